@@ -1,0 +1,31 @@
+import type { AskedField, Reading } from '../reader/understood.ts';
+
+/** A question the bot has asked and still waits for. */
+export interface Waiting {
+  readonly field: AskedField;
+  readonly reading: Reading;
+  readonly askedAt: number;
+  /** Choices of that field carry letters: `a` → the value it stands for, as the person would write it. */
+  readonly letters: Readonly<Record<string, string>>;
+}
+
+/** A reading that a button of an earlier reply refers to. */
+export interface Remembered {
+  readonly number: number;
+  readonly reading: Reading;
+  readonly at: number;
+}
+
+/** All that is kept of one conversation; plain JSON. */
+export interface Memory {
+  readonly waiting?: Waiting;
+  readonly remembered: readonly Remembered[];
+  readonly nextNumber: number;
+  /** Button keys of the last reply in order, so that `2` on a keyboard presses the second. */
+  readonly lastButtons: readonly string[];
+  /** The day (UTC date) on which this person last got an additive's cautions in full. */
+  readonly cautionedOn: Readonly<Record<string, string>>;
+}
+
+/** What is kept of somebody who never wrote. */
+export const FRESH_MEMORY: Memory = { remembered: [], nextNumber: 1, lastButtons: [], cautionedOn: {} };

@@ -1,0 +1,53 @@
+import type { AddedAnswer, DoseAnswer, EffectAnswer, SolutionAnswer } from '../../core/dose/answer.ts';
+import type { Language, Understood } from '../reader/understood.ts';
+import type { Reply } from '../replies/reply.ts';
+import type { Memory } from './memory.ts';
+
+/** Whom a conversation is with. A cellar may be several chats and people. */
+export interface Who {
+  readonly cellar: string;
+  readonly chat: string;
+  readonly person: string;
+}
+
+export type Content =
+  | { readonly kind: 'text'; readonly text: string }
+  | { readonly kind: 'press'; readonly key: string }
+  | {
+      readonly kind: 'unreadable';
+      readonly what: 'edited' | 'photo' | 'sticker' | 'voice' | 'file' | 'other';
+    };
+
+/** One thing a person sent, whatever the platform. */
+export interface IncomingMessage extends Who {
+  /** Names the event, so that the same one is never handled twice. */
+  readonly id: string;
+  /** When it was sent, in milliseconds since 1970. */
+  readonly at: number;
+  /** What the platform tells of the person's language. */
+  readonly language: Language;
+  readonly content: Content;
+}
+
+/** What has to be kept before anything is sent. */
+export type Write = { readonly kind: 'memory'; readonly who: Who; readonly memory: Memory };
+
+export type Answer = DoseAnswer | EffectAnswer | AddedAnswer | SolutionAnswer;
+
+/** Handling a message returns its writes and its replies as data; the edge commits, then sends. */
+export interface Handled {
+  readonly writes: readonly Write[];
+  readonly replies: readonly Reply[];
+  /** What was read and computed, for `ask --jsonl`; absent for a press and for what cannot be read. */
+  readonly understood?: Understood;
+  /** One element a reading; `null` where nothing may be said. */
+  readonly answers?: readonly (Answer | null)[];
+}
+
+/** Where the state of conversations is kept. Asynchronous, so that a database can stand behind it. */
+export interface StatePort {
+  /** What is remembered of this conversation; a fresh memory when nothing is. */
+  load(who: Who): Promise<Memory>;
+  /** Keeps all of it or none. Resolves only when it is kept. */
+  commit(writes: readonly Write[]): Promise<void>;
+}

@@ -1,0 +1,140 @@
+import type { AdditiveId } from '../../core/additives/additive-id.ts';
+import type { Problem } from '../../core/problem.ts';
+import type { Category, Product, Stage, Style, Target } from '../../core/wine.ts';
+
+export type Language = 'en' | 'es' | 'fr' | 'it' | 'de' | 'pt';
+
+export type Intent =
+  | 'dose'
+  | 'effect'
+  | 'added'
+  | 'reading'
+  | 'solution'
+  | 'titration'
+  | 'command'
+  | 'emergency'
+  | 'chat';
+
+/** What a message states, by the JSON names of the message language; volumes in litres, °C, mg/L. */
+export interface Fields {
+  readonly vessel?: string;
+  readonly vessels?: readonly string[];
+  readonly volume_L?: number;
+  readonly ph?: number;
+  readonly free_mg_L?: number;
+  readonly total_mg_L?: number;
+  readonly temperature_C?: number;
+  readonly alcohol_percent?: number;
+  readonly sugar_g_L?: number;
+  readonly style?: Style;
+  readonly category?: Category;
+  readonly product?: Product;
+  readonly organic?: true;
+  readonly stage?: Stage;
+  readonly additive?: AdditiveId;
+  readonly strength_percent?: number;
+  readonly tablet_SO2_g?: number;
+  readonly tablet_salt_g?: number;
+  readonly tablets?: number;
+  readonly target?: Target;
+  readonly binding_allowance_percent?: number;
+  readonly binding_share?: number;
+  readonly mass_g?: number;
+  readonly rate_mg_L?: number;
+  readonly added_mg_L?: number;
+  readonly additive_volume_mL?: number;
+}
+
+export type FieldName = keyof Fields;
+
+/** What the bot filled in; every one of these stands in the reply. */
+export interface Assumed {
+  readonly additive?: AdditiveId;
+  readonly target?: Target;
+  readonly stage?: Stage;
+  readonly volume_L?: number;
+  /** Present where a gallon was read without saying which. */
+  readonly gallon?: 'US' | 'imperial';
+}
+
+/** The fields that can be missing, by the names and in the order of the message language. */
+export const ASKED_FIELDS = [
+  'vessel',
+  'volume_L',
+  'ph',
+  'free_mg_L',
+  'target',
+  'additive',
+  'strength_percent',
+  'tablet_salt_g',
+  'tablet_SO2_g',
+  'mass_g',
+] as const;
+export type AskedField = (typeof ASKED_FIELDS)[number];
+
+/** How something was read, where the reply has to say so. `text` is the person's own words. */
+export interface ReadNote {
+  readonly id:
+    | 'free-unlabelled' // a figure without the word free was taken as free SO2
+    | 'ph-unlabelled' // a bare decimal was taken as the pH
+    | 'volume-sum' // `6+6+4 gal` was added up
+    | 'strength-as-salt' // a bisulfite strength was read as grams of salt
+    | 'strength-as-SO2' // … or as grams of SO2
+    | 'mass-beside-readings' // a mass without a volume was read as grams
+    | 'fruit-by-weight' // the volume is asked as only a weight of fruit was given
+    | 'ferment-stop' // the person wants to stop a fermentation
+    | 'spoon' // an amount in spoons
+    | 'negated' // something was said not to have been added
+    | 'each-or-total' // one volume beside several vessels
+    | 'did-you-mean'; // a word one letter from an additive
+  readonly text: string;
+}
+
+/** The unit a person used, so that the reply can answer in it. */
+export type VolumeUnit = 'L' | 'hL' | 'mL' | 'm3' | 'galUS' | 'galUK' | 'barrel';
+
+/** Where a field stood in the text (UTF-16 offsets of the message as it came). */
+export interface Place {
+  readonly start: number;
+  readonly end: number;
+  readonly text: string;
+}
+
+/** One reading of a message: what was said, what was assumed, what is asked, what is wrong. */
+export interface Reading {
+  readonly intent: Intent;
+  /** The matter of a `chat`, the word of a `command`, the kind of an `emergency`. */
+  readonly topic?: string;
+  readonly fields: Fields;
+  readonly assumed: Assumed;
+  readonly asks: readonly AskedField[];
+  readonly problems: readonly Problem[];
+  /** Figures that are none of ours, in the person's words. */
+  readonly setAside: readonly string[];
+  readonly notes: readonly ReadNote[];
+  /** The word `salt` beside a bisulfite strength. */
+  readonly strength_of?: 'salt';
+  readonly volumeUnit?: VolumeUnit;
+  readonly concentrationUnit?: 'ppm' | 'mg/L' | 'g/hL';
+  readonly where: Readonly<Partial<Record<FieldName, Place>>>;
+}
+
+/** What a message means. A round has several readings; `shared` applies to all of them. */
+export interface Understood {
+  readonly readings: readonly Reading[];
+  readonly shared: Fields;
+  /** The language the words of the message are of, where they tell; else the chat's. */
+  readonly language: Language;
+  readonly decimalMark: '.' | ',';
+}
+
+/** What the reader has to know of the chat. */
+export interface ReaderSettings {
+  readonly language: Language;
+  readonly gallon: 'US' | 'imperial';
+  readonly usualAdditive: AdditiveId;
+  readonly temperatureUnit: 'C' | 'F';
+  readonly volumeUnit: VolumeUnit;
+  /** Usual molecular targets in mg/L. */
+  readonly targets: { readonly red: number; readonly white: number; readonly sweet: number };
+}

@@ -1,0 +1,123 @@
+import type { Basis, Target } from '../wine.ts';
+import type { Step } from '../working.ts';
+
+/** What a scale or a cylinder shows. */
+export interface Measure {
+  readonly value: number;
+  readonly unit: 'g' | 'kg' | 'mL' | 'L' | 'tablets';
+}
+
+/** How much goes in, in full precision: SO2 in grams, and the additive as one of the three. */
+export interface Amount {
+  readonly SO2_g: number;
+  readonly mass_g?: number;
+  readonly additive_volume_mL?: number;
+  readonly tablets?: number;
+}
+
+/** An amount, what an instrument shows of it, and what that rounding changes in the wine (mg/L SO2). */
+export interface MeasuredAmount extends Amount {
+  readonly measure: Measure;
+  readonly rounding_mg_L: number;
+}
+
+/** The warning codes of the `ask` contract. New ones may be added; these names stay. */
+export type WarningCode =
+  | 'no-addition-needed'
+  | 'ph-unusual'
+  | 'stage-assumed'
+  | 'style-unknown'
+  | 'free-low-may-bind-all'
+  | 'free-needed-high'
+  | 'molecular-above-2'
+  | 'addition-large'
+  | 'total-over-limit'
+  | 'total-near-limit'
+  | 'total-unknown'
+  | 'no-limit-on-file'
+  | 'limit-unconfirmed'
+  | 'additive-not-permitted'
+  | 'basis-fallback'
+  | 'allowance-covers-less'
+  | 'gas-needs-training'
+  | 'rounding-coarse'
+  | 'no-dose-at-this-stage'
+  | 'does-not-stop-fermentation'
+  | 'already-dosed';
+
+/** A warning with the figures it is about, by their JSON names, in full precision. */
+export interface Warning {
+  readonly code: WarningCode;
+  readonly values: Readonly<Record<string, number | string>>;
+}
+
+/** One way out where the first line of the reply is a choice and not a dose. */
+export interface DoseChoice extends Partial<MeasuredAmount> {
+  /** Absent for "leave it as it is". */
+  readonly target?: Target;
+  readonly molecular_mg_L: number;
+  readonly free_mg_L: number;
+  readonly add_mg_L: number;
+  readonly dose_mg_L: number;
+}
+
+/** The small amount once more, as millilitres of a stock solution of the same salt. */
+export interface AsStock {
+  readonly strength_percent: number;
+  readonly additive_volume_mL: number;
+  readonly measure: Measure;
+}
+
+/** The answer of a `dose`; a key is absent when it cannot be known from what was said. */
+export interface DoseAnswer extends Partial<MeasuredAmount> {
+  readonly molecular_mg_L?: number;
+  readonly target_free_mg_L?: number;
+  readonly target_molecular_mg_L?: number;
+  readonly add_mg_L?: number;
+  readonly dose_mg_L?: number;
+  readonly per_vessel?: MeasuredAmount & { readonly count: number };
+  /** Under 5 g of powder, or the rest of a dose in tablets: the same as a 10 % stock. */
+  readonly stock?: AsStock;
+  /** mg/L of SO2 that `measure` gives where the rounding is worth a word (tablets). */
+  readonly measure_gives_mg_L?: number;
+  readonly free_after_mg_L?: number;
+  readonly free_expected_mg_L?: readonly [number, number];
+  readonly molecular_after_mg_L?: number;
+  readonly total_after_mg_L?: number;
+  readonly pK?: number;
+  readonly basis?: Basis;
+  readonly warnings: readonly Warning[];
+  readonly choices?: readonly DoseChoice[];
+  readonly steps: readonly Step[];
+}
+
+/** The answer of an `effect`: what an amount, or a rate of additive, does to the wine. */
+export interface EffectAnswer {
+  readonly SO2_g?: number;
+  readonly adds_mg_L?: number;
+  readonly mass_g?: number;
+  readonly free_after_mg_L?: number;
+  readonly free_expected_mg_L?: readonly [number, number];
+  readonly molecular_after_mg_L?: number;
+  readonly total_after_mg_L?: number;
+  readonly pK?: number;
+  readonly basis?: Basis;
+  readonly warnings: readonly Warning[];
+  readonly steps: readonly Step[];
+}
+
+/** The answer of an `added`: what follows from the entry, as far as it does. */
+export interface AddedAnswer extends Partial<Amount> {
+  readonly added_mg_L?: number;
+  readonly steps: readonly Step[];
+}
+
+/** The answer of a `solution`: a stock of salt in water. */
+export interface SolutionAnswer {
+  readonly salt_g?: number;
+  readonly additive_volume_mL?: number;
+  readonly volume_L: number;
+  readonly strength_SO2_g_per_100_mL: number;
+  readonly measure?: Measure;
+  readonly steps: readonly Step[];
+}

@@ -1,0 +1,71 @@
+import type { AdditiveAtHand } from '../additives/additive-id.ts';
+import type { Basis, Category, Product, Stage, Style, Target } from '../wine.ts';
+
+/** What is known of the wine. Units stand in the names; every one may be unknown. */
+export interface WineFacts {
+  readonly ph?: number;
+  readonly free_mg_L?: number;
+  readonly total_mg_L?: number;
+  readonly temperature_C?: number;
+  readonly alcohol_percent?: number;
+  readonly sugar_g_L?: number;
+  readonly style?: Style;
+  readonly category?: Category;
+  readonly product?: Product;
+}
+
+/** A question for a dose. */
+export interface DoseRequest extends WineFacts {
+  readonly volume_L?: number;
+  /** How many equal vessels or barrels `volume_L` is the sum of, where a reading names several. */
+  readonly vessels?: number;
+  /** The additive; absent when its name, strength or size is still asked, so that no amount is given. */
+  readonly additive?: AdditiveAtHand;
+  /** What is aimed at; absent when it has to be asked. */
+  readonly target?: Target;
+  /** Whether the person stated the target. An assumed one that needs much free SO2 becomes a choice. */
+  readonly targetStated: boolean;
+  readonly stage: Stage;
+  readonly stageStated: boolean;
+  /** Share added to the dose: 30 for × 1.30. */
+  readonly binding_allowance_percent?: number;
+  /** Share of the addition that is lost: 1/3 for ÷ (1 − 1/3). */
+  readonly binding_share?: number;
+  readonly basis: Basis;
+}
+
+/** How much additive went or would go in; exactly one of the amounts is present. */
+export interface StatedAmount {
+  readonly mass_g?: number;
+  readonly additive_volume_mL?: number;
+  /** A number of small plain tablets, each of `additive.tablet_salt_g`. */
+  readonly tablets?: number;
+  /** Milligrams of the additive itself per litre of wine. */
+  readonly rate_mg_L?: number;
+  /** mg/L of SO2, in an `added`. */
+  readonly added_mg_L?: number;
+}
+
+/** A question for what an amount does. */
+export interface EffectRequest extends WineFacts, StatedAmount {
+  readonly volume_L?: number;
+  readonly additive?: AdditiveAtHand;
+  readonly stage: Stage;
+  readonly stageStated: boolean;
+  /** Whether the person wants it to stop a fermentation: it does not. */
+  readonly toStopFermentation: boolean;
+  readonly basis: Basis;
+}
+
+/** An addition that was made. */
+export interface AddedRequest extends StatedAmount {
+  readonly volume_L?: number;
+  readonly additive?: AdditiveAtHand;
+}
+
+/** A stock of salt in water: a volume and either its strength or the grams of salt that go in. */
+export interface SolutionRequest {
+  readonly volume_L: number;
+  readonly additive: AdditiveAtHand;
+  readonly mass_g?: number;
+}
