@@ -1,12 +1,12 @@
-import type { AskedField, Reading } from '../reader/understood.ts';
+import type { AskedField, Fields, Reading } from '../reader/understood.ts';
 
 /** A question the bot has asked and still waits for. */
 export interface Waiting {
   readonly field: AskedField;
   readonly reading: Reading;
   readonly askedAt: number;
-  /** Choices of that field carry letters: `a` → the value it stands for, as the person would write it. */
-  readonly letters: Readonly<Record<string, string>>;
+  /** Choices of that field carry letters: `a` → the fields it stands for. */
+  readonly letters: Readonly<Record<string, Fields>>;
 }
 
 /** A reading that a button of an earlier reply refers to. */
@@ -23,6 +23,11 @@ export interface Memory {
   readonly nextNumber: number;
   /** Button keys of the last reply in order, so that `2` on a keyboard presses the second. */
   readonly lastButtons: readonly string[];
+  /**
+   * When the bot asked how many mg/L at a stage where nothing may wait for the answer: a bare number
+   * that follows is asked about, never taken.
+   */
+  readonly askedTargetAt?: number;
   /** The day (UTC date) on which this person last got an additive's cautions in full. */
   readonly cautionedOn: Readonly<Record<string, string>>;
 }

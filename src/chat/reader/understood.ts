@@ -115,6 +115,8 @@ export interface Reading {
   /** The word `salt` beside a bisulfite strength. */
   readonly strength_of?: 'salt';
   readonly volumeUnit?: VolumeUnit;
+  /** How many equal barrels or vessels `volume_L` is the sum of (`6 barrels`, `40 x 225 L`). */
+  readonly containers?: number;
   readonly concentrationUnit?: 'ppm' | 'mg/L' | 'g/hL';
   readonly where: Readonly<Partial<Record<FieldName, Place>>>;
 }
