@@ -1,0 +1,55 @@
+import type { Handled, IncomingMessage, StatePort } from '../../chat/conversation/ports.ts';
+import type { Memory } from '../../chat/conversation/memory.ts';
+import type { Reply } from '../../chat/replies/reply.ts';
+import type { Log } from '../logging.ts';
+import { failureOf } from './failure.ts';
+import type { SaidReply } from './from-reply.ts';
+import { clientSignal, type Platform } from './platform.ts';
+import { sendReplies } from './send-replies.ts';
+import type { Arrival } from './to-message.ts';
+
+/** The conversation, handed in: it computes and neither keeps nor sends. */
+export interface Conversation {
+  readonly handle: (message: IncomingMessage, memory: Memory) => Handled;
+  readonly say: (reply: Reply) => SaidReply;
+}
+
+/** What answering needs. */
+export interface AnswerOptions extends Conversation {
+  readonly state: StatePort;
+  readonly platform: Platform;
+  readonly log: Log;
+  /** Aborted when there is no time left. */
+  readonly signal: AbortSignal;
+}
+
+/**
+ * Answers one arrival: what has to be kept is kept first, then the replies are sent. Never rejects: what fails is
+ * logged. Gives back whether the arrival is done with; if not, the platform has to deliver it again.
+ */
+export async function answerArrival(arrival: Arrival, options: AnswerOptions): Promise<boolean> {
+  const { handle, say, state, platform, log, signal } = options;
+  const { message, chatId, updateId, tapId } = arrival;
+  if (signal.aborted) return false;
+  const told = tapId === undefined ? undefined : tellTapSeen(tapId, options);
+  try {
+    const { writes, replies } = handle(message, await state.load(message));
+    await state.commit(writes);
+    const sent = await sendReplies(chatId, replies.map(say), { api: platform.patient, log, signal });
+    return sent === 'ended';
+  } catch (error) {
+    log.error({ err: error, update: updateId }, 'a message could not be answered');
+    return true;
+  } finally {
+    await told;
+  }
+}
+
+/** Ends the waiting mark on a tapped button. One try: the answer itself counts, and an old tap is refused anyway. */
+const tellTapSeen = async (tapId: string, { platform, log, signal }: AnswerOptions): Promise<void> => {
+  try {
+    await platform.once.answerCallbackQuery(tapId, {}, clientSignal(signal));
+  } catch (error) {
+    log.debug({ failure: failureOf(error) }, 'a tap could not be acknowledged');
+  }
+};

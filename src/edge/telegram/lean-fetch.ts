@@ -1,0 +1,107 @@
+import type { Agent, ClientRequest, IncomingMessage as HttpResponse, RequestOptions } from 'node:http';
+
+/** As much of `fetch` as the Bot API client uses. */
+export interface LeanFetch {
+  (url: string, init: LeanRequest): Promise<LeanResponse>;
+  /** Closes the connections that wait for the next call. */
+  close(): void;
+}
+
+export interface LeanRequest {
+  readonly method?: string;
+  readonly headers?: Record<string, string>;
+  readonly body?: string;
+  /** Any thing with the shape of an AbortSignal: the client brings one of its own, which Node's fetch refuses. */
+  readonly signal?: Pick<AbortSignal, 'aborted' | 'addEventListener' | 'removeEventListener'>;
+}
+
+export interface LeanResponse {
+  readonly status: number;
+  json(): Promise<unknown>;
+}
+
+/** The Bot API was asked and did not answer in its own words. Holds no URL, as the URL holds the token. */
+export class NoAnswer extends Error {
+  override readonly name = 'NoAnswer';
+}
+
+/** What `node:http` and `node:https` have in common, as far as it is used. */
+interface HttpModule {
+  readonly Agent: new (options: { keepAlive: boolean; maxSockets: number }) => Agent;
+  request(url: URL, options: RequestOptions): ClientRequest;
+}
+
+/** Beyond this many calls at once, the next one waits for a connection. */
+const MOST_CONNECTIONS = 64;
+
+/**
+ * Makes a `fetch` over kept-alive connections of `node:http` and `node:https`. It costs about a third of what the
+ * client's own one does. The modules are taken at the call, as they load slowly, and as a test may replace them.
+ */
+export function createLeanFetch(): LeanFetch {
+  const agents = new Map<string, Agent>();
+  const moduleOf = (protocol: string): HttpModule =>
+    process.getBuiltinModule(protocol === 'https:' ? 'node:https' : 'node:http');
+  const agentOf = (protocol: string): Agent => {
+    const known = agents.get(protocol);
+    if (known !== undefined) return known;
+    const made = new (moduleOf(protocol).Agent)({ keepAlive: true, maxSockets: MOST_CONNECTIONS });
+    agents.set(protocol, made);
+    return made;
+  };
+
+  const call = (url: URL, init: LeanRequest, mayRepeat: boolean): Promise<LeanResponse> =>
+    new Promise((resolve, reject) => {
+      const { signal, body, method = 'GET', headers = {} } = init;
+      if (signal?.aborted === true) return reject(new NoAnswer('the call was given up'));
+      const options: RequestOptions = { method, headers, agent: agentOf(url.protocol) };
+      const request = moduleOf(url.protocol).request(url, options);
+      const giveUp = (): void => void request.destroy(new NoAnswer('the call was given up'));
+      const settle = (): void => signal?.removeEventListener('abort', giveUp);
+      signal?.addEventListener('abort', giveUp);
+      request.on('error', (error: NodeJS.ErrnoException) => {
+        settle();
+        // Most likely the other side closed a waiting connection just as we took it.
+        const stale = request.reusedSocket && error.code === 'ECONNRESET';
+        if (stale && mayRepeat) resolve(call(url, init, false));
+        else reject(error);
+      });
+      request.on('response', (response) => {
+        readWhole(response).then(
+          (text) => {
+            settle();
+            resolve({ status: response.statusCode ?? 0, json: async () => parse(text, response.statusCode) });
+          },
+          (error: Error) => {
+            settle();
+            reject(error);
+          },
+        );
+      });
+      request.end(body);
+    });
+
+  return Object.assign((url: string, init: LeanRequest) => call(new URL(url), init, true), {
+    close: () => {
+      for (const agent of agents.values()) agent.destroy();
+      agents.clear();
+    },
+  });
+}
+
+const readWhole = (response: HttpResponse): Promise<string> =>
+  new Promise((resolve, reject) => {
+    const parts: Buffer[] = [];
+    response.on('data', (part: Buffer) => parts.push(part));
+    response.on('end', () => resolve(Buffer.concat(parts).toString('utf8')));
+    response.on('error', reject);
+    response.on('aborted', () => reject(new NoAnswer('the connection was cut in the middle of the answer')));
+  });
+
+const parse = (text: string, status: number | undefined): unknown => {
+  try {
+    return JSON.parse(text);
+  } catch (cause) {
+    throw new NoAnswer(`status ${status} with a body that is not JSON`, { cause });
+  }
+};

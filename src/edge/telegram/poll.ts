@@ -1,0 +1,70 @@
+import type { Api } from 'grammy';
+
+import type { Clock } from '../clock.ts';
+import type { BackOff } from './back-off.ts';
+import { failureOf } from './failure.ts';
+import type { Intake } from './intake.ts';
+import { clientSignal } from './platform.ts';
+import { ALLOWED_UPDATES, readUpdates, type TelegramUpdate } from './update.ts';
+
+/** What polling needs. */
+export interface PollOptions {
+  readonly api: Api;
+  readonly intake: Intake;
+  /** Takes an update that is kept. */
+  readonly accept: (update: TelegramUpdate) => void;
+  readonly backOff: BackOff;
+  readonly clock: Clock;
+  /** How long the platform holds a poll open when there is nothing, in seconds. */
+  readonly longPoll_s: number;
+  /** A poll that has not ended by then is left behind, whatever the client does, in seconds. */
+  readonly watchdog_s: number;
+  readonly signal: AbortSignal;
+}
+
+/**
+ * Reads updates until the signal is aborted: a batch is offered to the intake, and only when it is kept does the
+ * next poll confirm it. Gives back the offset that is to be confirmed next.
+ *
+ * @throws OperatorError when the token is no longer accepted.
+ */
+export async function poll(options: PollOptions): Promise<number> {
+  const { api, intake, accept, backOff, signal } = options;
+  let offset = 0;
+  while (!signal.aborted) {
+    try {
+      const updates = readUpdates(await askForUpdates(offset, options));
+      const fresh = await intake.offer(updates);
+      for (const { update_id } of updates) offset = Math.max(offset, update_id + 1);
+      for (const update of fresh) accept(update);
+      backOff.succeeded();
+    } catch (error) {
+      if (signal.aborted) break;
+      if (isWebhookInTheWay(error)) await api.deleteWebhook().catch(() => undefined);
+      await backOff.failed(error);
+    }
+  }
+  return offset;
+}
+
+const askForUpdates = async (offset: number, options: PollOptions): Promise<unknown> => {
+  const { api, clock, longPoll_s, watchdog_s, signal } = options;
+  const ended = new AbortController();
+  const watchdog = clock.wait(1000 * watchdog_s, ended.signal).then(() => {
+    if (!ended.signal.aborted) throw new Error(`a poll did not end within ${watchdog_s} s`);
+    return [];
+  });
+  const params = { offset, timeout: longPoll_s, allowed_updates: ALLOWED_UPDATES };
+  try {
+    const updates = api.getUpdates(params, clientSignal(signal));
+    return await Promise.race([updates, watchdog]);
+  } finally {
+    ended.abort();
+  }
+};
+
+/** Polling is refused while a webhook is set: the operator asked for polling, so it goes. */
+const isWebhookInTheWay = (error: unknown): boolean => {
+  const failure = failureOf(error);
+  return failure.kind === 'refused' && failure.code === 409 && /webhook/i.test(failure.reason);
+};

@@ -1,0 +1,96 @@
+import type { Content, IncomingMessage } from '../../chat/conversation/ports.ts';
+import { languageOf } from './language-of.ts';
+import type { TelegramMessage, TelegramUpdate } from './update.ts';
+import { isServed, whoOf } from './who-of.ts';
+
+/** An update that somebody wrote to us and that is to be answered. */
+export interface Arrival {
+  readonly updateId: number;
+  readonly chatId: number;
+  readonly message: IncomingMessage;
+  /** The tap that the platform waits to hear about; only with a press. */
+  readonly tapId?: string;
+}
+
+type Unreadable = Extract<Content, { kind: 'unreadable' }>['what'];
+
+/** What a message can carry instead of text. What is not in it (a pinned message, a new title) is no message. */
+const UNREADABLE: readonly (readonly [field: string, what: Unreadable])[] = [
+  ['photo', 'photo'],
+  ['live_photo', 'photo'],
+  ['sticker', 'sticker'],
+  ['voice', 'voice'],
+  ['audio', 'voice'],
+  ['video_note', 'voice'],
+  // An animation comes with a document as well.
+  ['animation', 'other'],
+  ['document', 'file'],
+  ['video', 'other'],
+  ['location', 'other'],
+  ['venue', 'other'],
+  ['contact', 'other'],
+  ['poll', 'other'],
+  ['checklist', 'other'],
+  ['dice', 'other'],
+  ['game', 'other'],
+  ['story', 'other'],
+  ['paid_media', 'other'],
+];
+
+const contentOf = (message: TelegramMessage): Content | undefined => {
+  if (message.text !== undefined) return { kind: 'text', text: message.text };
+  const what = UNREADABLE.find(([field]) => message[field] !== undefined)?.[1];
+  return what === undefined ? undefined : { kind: 'unreadable', what };
+};
+
+const fromMessage = (
+  updateId: number,
+  message: TelegramMessage,
+  options: { readonly edited: boolean },
+): Arrival | undefined => {
+  const { chat, from } = message;
+  if (from === undefined || from.is_bot === true || !isServed(chat)) return undefined;
+  // A live location is edited every few seconds by itself.
+  if (options.edited && message.text === undefined && message['caption'] === undefined) return undefined;
+  const content: Content | undefined = options.edited
+    ? { kind: 'unreadable', what: 'edited' }
+    : contentOf(message);
+  if (content === undefined) return undefined;
+  const edit = options.edited ? ` edited ${message.edit_date ?? message.date}` : '';
+  return {
+    updateId,
+    chatId: chat.id,
+    message: {
+      ...whoOf(chat, from),
+      // By the message and not by the update, whose numbers begin anew after a quiet week.
+      id: `message ${message.message_id}${edit}`,
+      at: 1000 * ((options.edited ? message.edit_date : undefined) ?? message.date),
+      language: languageOf(from.language_code),
+      content,
+    },
+  };
+};
+
+/**
+ * Makes of an update the message that the conversation handles, or nothing where there is nothing to answer.
+ *
+ * @param now milliseconds since 1970: the time of a tap, for which the platform gives none.
+ */
+export function toMessage(update: TelegramUpdate, now: number): Arrival | undefined {
+  const { update_id: updateId, message, edited_message: edited, callback_query: tap } = update;
+  if (message !== undefined) return fromMessage(updateId, message, { edited: false });
+  if (edited !== undefined) return fromMessage(updateId, edited, { edited: true });
+  if (tap?.data === undefined || tap.message === undefined || !isServed(tap.message.chat)) return undefined;
+  return {
+    updateId,
+    chatId: tap.message.chat.id,
+    tapId: tap.id,
+    message: {
+      ...whoOf(tap.message.chat, tap.from),
+      id: `tap ${tap.id}`,
+      at: now,
+      language: languageOf(tap.from.language_code),
+      content: { kind: 'press', key: tap.data },
+    },
+  };
+}
