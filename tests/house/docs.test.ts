@@ -3,10 +3,8 @@ import { exportedFrom, parametersOf } from './exported.ts';
 import type { Exported } from './exported.ts';
 import { exampleBlocks } from './example-blocks.ts';
 import { parse, placeOf, sourceFiles } from './source-file.ts';
+import { UNIT_WORD } from './unit-words.ts';
 
-/** A unit in a doc comment or at the end of a name, or the word that there is none. */
-const UNIT =
-  /mg\/L|g\/L|g\/hL|mol|\b(litres?|millilitres?|grams?|milligrams?|kilograms?|percent|degrees?|pH|ppm|milliseconds|seconds)\b|\d (L|g|mL|kg)\b|\bin (L|g|mL|kg)\b|%|°|_(L|mL|hL|g|kg|mg_L|g_L|C|K|percent|share|ms)\b|(no|without) (unit|dimension)|dimensionless|pure number|\bunits?\b|\b(digits|decimals|count)\b/i;
 /** A bound, or the place a figure is from. */
 const RANGE_OR_SOURCE =
   /\d ?(–|-|to|…) ?-?\d|\b(from .+ to|at least|at most|between|above|below|over|under|up to|never|positive|negative|not negative|finite|any (number|value)|range|source|sources|RangeError|table|standard|published|common practice|by definition|exact)\b|[<>≤≥]|@throws/i;
@@ -31,7 +29,7 @@ function missing(exported: Exported): string[] {
   if (core && takesNumbers(exported)) {
     const signature = parametersOf(exported).map((one) => file.text.slice(one.start, one.end));
     const prose = doc.split('@example')[0] ?? '';
-    if (!UNIT.test(`${prose} ${signature.join(' ')}`)) lacks.push('unit');
+    if (!UNIT_WORD.test(`${prose} ${signature.join(' ')}`)) lacks.push('unit');
     if (!RANGE_OR_SOURCE.test(prose)) lacks.push('range or source');
   }
   if ((core || file.path.startsWith('src/chat/replies/')) && exampleBlocks(doc).length === 0)

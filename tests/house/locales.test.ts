@@ -62,9 +62,10 @@ describe('sentences and code belong together', () => {
   });
 });
 
-test.each(readdirSync('locales'))('%s has the sentences of en.ftl, each with the same values', (name) => {
+test.each(readdirSync('locales'))('%s says nothing that en.ftl does not say with the same values', (name) => {
   const others = localeMessages(readFileSync(`locales/${name}`, 'utf8'));
-  expect(Object.fromEntries(others)).toEqual(Object.fromEntries(messages));
+  const wanted = [...others.keys()].map((key) => [key, messages.get(key) ?? 'not in en.ftl']);
+  expect(Object.fromEntries(others)).toEqual(Object.fromEntries(wanted));
 });
 
 describe('the rules find what is planted', () => {

@@ -3,7 +3,7 @@ import { filesUnder } from './source-file.ts';
 
 const KEBAB = /^\.?[a-z0-9]+(-[a-z0-9]+)*(\.[a-z0-9]+(-[a-z0-9]+)*)*$/;
 /** Names that say where things were put because nobody knew what they were. */
-const SAYS_NOTHING = /(^|[-./])(utils?|helpers?|common|managers?|misc|shared|lib|stuff)([-./]|$)/;
+const SAYS_NOTHING = /(^|[-./])(utils?|helpers?|common|managers?|misc|lib|stuff)([-./]|$)/;
 
 function badNames(paths: readonly string[]): string[] {
   return paths.filter((path) => SAYS_NOTHING.test(path) || path.split('/').some((part) => !KEBAB.test(part)));

@@ -1,12 +1,14 @@
 import { expect, test } from 'vitest';
 import { Visitor } from 'vite';
 import type { ESTree } from 'vite';
+import { exportedFrom, parametersOf } from './exported.ts';
 import { parse, placeOf, sourceFiles } from './source-file.ts';
 import type { SourceFile } from './source-file.ts';
+import { UNIT_WORD } from './unit-words.ts';
 
-/** A unit at the end of a name; `per` as in `g_per_100_mL`, the upper-case forms for constants. */
+/** A unit at the end of a name. */
 const UNIT =
-  /_(L|hL|mL|g|kg|mg|mol|C|F|K|percent|share|ms|s|minutes|hours|mg_L|g_L|g_hL|mol_L|g_mol|mg_mmol|(g|L|mL|mg)_per_[0-9A-Za-z_]+)(_[a-z]+)?$/;
+  /(^|_)(L|hL|mL|g|kg|mg|mol|C|F|K|percent|share|ms|s|pK|mg_L|g_L|g_hL|mol_L|g_mol|(g|L|mL|mg)_per_[0-9A-Za-z_]+)(_[a-z]+)?$|At$/;
 /** Pure numbers of chemistry and arithmetic, counts, and places in a text or a list. */
 const BARE = new Set([
   'ph',
@@ -15,7 +17,6 @@ const BARE = new Set([
   'factor',
   'ratio',
   'fraction',
-  'share',
   'value', // of a Quantity or a Measure: the unit is the field beside it
   'number',
   'count',
@@ -29,43 +30,64 @@ const BARE = new Set([
   'sweet',
   'decimals',
   'digits',
+  'code', // of a character
   'start',
   'end',
   'index',
-  'at', // a time in milliseconds since 1970, as in every `…At`
-  'nextNumber',
-  'code', // of a character
+  'i',
   'offset',
-  'position',
-  'length',
   'from',
   'to',
+  'next',
+  'place',
+  'rows',
+  'columns',
+  'position',
+  'at', // a time in milliseconds since 1970, as in every `…At`
+  'nextNumber',
 ]);
 
+/**
+ * Numbers without a unit in their name: fields of types, and parameters of exported functions. Where one works in any
+ * unit, the comment of the field or the `@param` says so.
+ */
 function unitless(file: SourceFile): string[] {
   const found: string[] = [];
-  const judge = (name: string, start: number): void => {
-    if (!BARE.has(name) && !UNIT.test(name) && !name.endsWith('At'))
-      found.push(`${placeOf(file, start)} ${name}`);
+  const judge = (
+    node: ESTree.Node,
+    name: string,
+    type: ESTree.TSTypeAnnotation | null | undefined,
+    said: string,
+  ) => {
+    if (!isNumber(type) || BARE.has(name) || UNIT.test(name) || UNIT_WORD.test(said)) return;
+    found.push(`${placeOf(file, node.start)} ${name}`);
   };
-  const named = (node: ESTree.BindingPattern | ESTree.ParamPattern): void => {
-    if (node.type === 'Identifier' && isNumber(node.typeAnnotation)) judge(node.name, node.start);
-  };
-  const parameters = (node: { readonly params: readonly ESTree.ParamPattern[] }): void =>
-    node.params.forEach(named);
   new Visitor({
-    FunctionDeclaration: parameters,
-    FunctionExpression: parameters,
-    ArrowFunctionExpression: parameters,
     TSPropertySignature(node) {
-      if (node.key.type === 'Identifier' && isNumber(node.typeAnnotation)) judge(node.key.name, node.start);
+      if (node.key.type === 'Identifier')
+        judge(node, node.key.name, node.typeAnnotation, commentOf(file, node));
     },
-    VariableDeclarator: (node) => named(node.id),
   }).visit(file.program);
+  for (const exported of exportedFrom(file)) {
+    for (const parameter of parametersOf(exported)) {
+      if (parameter.type !== 'Identifier') continue;
+      const said = new RegExp(`@param ${parameter.name}\\b[^@]*`).exec(exported.doc)?.[0] ?? '';
+      judge(parameter, parameter.name, parameter.typeAnnotation, said);
+    }
+  }
   return found;
 }
 
-/** `number`, `number | undefined`, `readonly [number, number]`. */
+/** The comment right above a node, or behind it on its line. */
+function commentOf(file: SourceFile, node: ESTree.Node): string {
+  const close = file.comments.filter((comment) => {
+    const gap = comment.end <= node.start ? [comment.end, node.start] : [node.end, comment.start];
+    return /^;?\s*$/.test(file.text.slice(...gap)) && !/\n.*\n/.test(file.text.slice(...gap));
+  });
+  return close.map((comment) => comment.value).join(' ');
+}
+
+/** `number`, `number | undefined`. */
 function isNumber(annotation: ESTree.TSTypeAnnotation | null | undefined): boolean {
   const type = annotation?.typeAnnotation;
   if (type?.type === 'TSUnionType')
@@ -79,14 +101,17 @@ test('a number carries its unit in its name, because 200 of the wrong unit looks
 
 test.each([
   'export function f(volume: number): void {}',
-  'const f = (mass: number | undefined) => mass;',
+  'export const f = (mass: number | undefined) => mass;',
   'export interface A { readonly free?: number }',
-  'const strength: number = 3;',
+  '/** Rounds it.\n * @param amount what to round */\nexport function f(amount: number): void {}',
 ])('the rule finds %s', (text) => {
   expect(unitless(parse('src/core/planted.ts', text))).toHaveLength(1);
 });
 
-test('the rule lets units, pure numbers and other types be', () => {
-  const text = 'export function f(volume_L: number, ph: number, name: string, free_mg_L?: number): void {}';
+test.each([
+  'export function f(volume_L: number, ph: number, name: string, free_mg_L?: number): void {}',
+  'export interface A {\n  /** In grams. */\n  readonly mass?: number;\n  readonly free: number; // mg/L\n}',
+  '/** Rounds it.\n * @param amount in the unit of `step` */\nexport function f(amount: number): void {}',
+])('the rule lets %s be', (text) => {
   expect(unitless(parse('src/core/planted.ts', text))).toEqual([]);
 });

@@ -1,0 +1,89 @@
+/** `npm run bench`: what a message costs, beside what was aimed at. Aims are no tests: machines differ. */
+import { handle } from '../../src/chat/conversation/conversation.ts';
+import { FRESH_MEMORY } from '../../src/chat/conversation/memory.ts';
+import { DEFAULT_SETTINGS } from '../../src/chat/conversation/settings.ts';
+import { readMessage } from '../../src/chat/reader/read-message.ts';
+import { say } from '../fuzz/say.ts';
+import { writtenMessages } from '../fuzz/written-messages.ts';
+import { HARD_TEXTS } from './hard-texts.ts';
+import { runAsk } from './programs.ts';
+import { roundOf } from './rounds.ts';
+import { median, timeOf } from './timing.ts';
+
+const TYPICAL = 'T4 1450 gal pH 3.58 free 21';
+const JSONL_LINES = 10_000;
+
+function row(name: string, seen: string, aim = ''): void {
+  process.stdout.write(`${name.padEnd(46)} ${seen.padStart(12)}   ${aim}\n`);
+}
+
+const ms = (milliseconds: number): string => `${milliseconds.toPrecision(3)} ms`;
+
+/** From the bytes of a message to the text of its replies. */
+function answer(body: string): string {
+  const { text } = JSON.parse(body) as { readonly text: string };
+  const who = { cellar: 'c', chat: 'c', person: 'p' };
+  const message = { ...who, id: '1', at: 0, language: 'en', content: { kind: 'text', text } } as const;
+  return handle(message, FRESH_MEMORY, DEFAULT_SETTINGS)
+    .replies.map((reply) => say(reply).text)
+    .join('\n');
+}
+
+/** The barest bot: the same bytes in, their text out. */
+function echo(body: string): string {
+  return (JSON.parse(body) as { readonly text: string }).text;
+}
+
+function bytesOf(text: string): string {
+  return JSON.stringify({ text });
+}
+
+row('what', 'seen', 'aim');
+
+const typical = bytesOf(TYPICAL);
+const answered = timeOf(() => answer(typical), { times: 4000, warmUp: 2000 });
+const manyEchoes = timeOf(() => Array.from({ length: 1000 }, () => echo(typical)), {
+  times: 200,
+  warmUp: 50,
+});
+row('answer to one reading', ms(answered), 'at most 0.3 ms, wished 0.15 ms');
+row('… against echoing it', `${Math.round(answered / (manyEchoes / 1000))} ×`);
+row(
+  'reading of it alone',
+  ms(timeOf(() => readMessage(TYPICAL, DEFAULT_SETTINGS), { times: 4000, warmUp: 500 })),
+);
+
+const perLine = [10, 200].map((vessels) => {
+  const body = bytesOf(roundOf(vessels));
+  const once = timeOf(() => answer(body), { times: 100, warmUp: 20 });
+  row(`round of ${vessels}, a line`, ms(once / vessels));
+  return once / vessels;
+});
+row(
+  '… a line of 200 against a line of 10',
+  `${((perLine[1] ?? 0) / (perLine[0] ?? 1)).toFixed(2)} ×`,
+  'at most 1.2 ×',
+);
+
+const read = (text: string): number =>
+  timeOf(() => readMessage(text, DEFAULT_SETTINGS), { times: 15, warmUp: 5 });
+const written = writtenMessages().map((text) => [text, read(text)] as const);
+const [worstText, worst] = written.toSorted(([, a], [, b]) => b - a)[0] ?? ['', 0];
+row(`reading ${written.length} written messages, median`, ms(median(written.map(([, time]) => time))));
+row('… the slowest', ms(worst), `at most 5 ms: ${JSON.stringify(worstText.slice(0, 40))}`);
+
+const hard = HARD_TEXTS.map(([name, text]) => [name, read(text)] as const).toSorted(([, a], [, b]) => b - a);
+row(`reading ${hard.length} texts of 4,096 characters, median`, ms(median(hard.map(([, time]) => time))));
+for (const [name, time] of hard.slice(0, 3)) row(`… ${name}`, ms(time), 'at most 5 ms');
+
+const starts: number[] = [];
+for (let i = 0; i < 7; i += 1) starts.push((await runAsk([TYPICAL])).milliseconds);
+row('start to first answer', ms(median(starts)), 'at most 600 ms');
+
+const texts = writtenMessages();
+const lines = Array.from({ length: JSONL_LINES }, (_, at) =>
+  JSON.stringify({ id: String(at), language: 'en', text: texts[at % texts.length] }),
+);
+const jsonl = await runAsk(['--jsonl'], `${lines.join('\n')}\n`);
+row(`${JSONL_LINES} lines through ask --jsonl`, `${(jsonl.milliseconds / 1000).toFixed(1)} s`, 'under 15 s');
+row('… lines answered', String(jsonl.lines), String(JSONL_LINES));

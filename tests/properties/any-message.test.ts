@@ -1,0 +1,13 @@
+import fc from 'fast-check';
+import { expect, test } from 'vitest';
+import { anyTalk, play } from '../fuzz/conversation-of.ts';
+import { faults } from '../fuzz/faults.ts';
+
+test('no message throws, nor gets a dose beside a problem, an amount without what it needs, or a hidden assumption', () => {
+  fc.assert(
+    fc.property(anyTalk, (talk) => {
+      for (const turn of play(talk)) expect(faults(turn)).toEqual([]);
+    }),
+    { numRuns: 1500 },
+  );
+});
