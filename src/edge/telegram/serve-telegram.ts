@@ -76,8 +76,9 @@ export async function serveTelegram(options: TelegramOptions): Promise<void> {
     await Promise.race([queues.idle(), clock.wait(1000 * times.finish_s, giveUp.signal)]);
     giveUp.abort();
     await queues.idle();
-    const next = (await intake.unfinished())[0] ?? offset;
-    await confirmOffset(next, { api: platform.once, clock, log, within_s: times.confirm_s });
+    const left = await intake.unfinished();
+    if (left.length > 0) log.warn({ left: left.length }, 'there was no time left for some messages');
+    await confirmOffset(left[0] ?? offset, { api: platform.once, clock, log, within_s: times.confirm_s });
   } finally {
     giveUp.abort();
     platform.close();

@@ -1,0 +1,66 @@
+import { describe, expect, test } from 'vitest';
+
+import { createMemoryStore } from '../../../src/edge/store/memory.ts';
+import { Person } from './person.ts';
+import { openScene } from './scene.ts';
+
+describe('what goes wrong in one chat', () => {
+  test('stays there: a blocked bot says nothing more to that person', async () => {
+    await using scene = await openScene();
+    const { api, rosa, serve } = scene;
+    api.fail('sendMessage', { error_code: 403, description: 'Forbidden: bot was blocked by the user' });
+    const bot = serve();
+    rosa.sends('two');
+    const timo = new Person(api, 7002);
+    await api.until(() => api.callsOf('sendMessage').length > 0);
+    timo.sends('first');
+    expect(await timo.reads(1)).toBe('1: first');
+    expect(rosa.texts).toEqual([]);
+    expect(bot.logged.filter((line) => /"level":[56]0/.test(line))).toEqual([]);
+  });
+
+  test('does not hold up another chat', async () => {
+    await using scene = await openScene();
+    const { api, rosa, serve } = scene;
+    api.fail('sendMessage', 'hang');
+    serve({ times: { finish_s: 1 } });
+    rosa.sends('first');
+    await api.until(() => api.callsOf('sendMessage').length > 0);
+    const timo = new Person(api, 7002);
+    timo.sends('first');
+    expect(await timo.reads(1)).toBe('1: first');
+    expect(rosa.texts).toEqual([]);
+  });
+
+  test('is logged, and the next reply and the next message are served', async () => {
+    await using scene = await openScene();
+    const { api, rosa, serve } = scene;
+    api.fail('sendMessage', { error_code: 400, description: 'Bad Request: a planted fault' });
+    const bot = serve();
+    rosa.sends('two');
+    rosa.sends('throw');
+    rosa.sends('last');
+    await rosa.reads(2);
+    expect(rosa.texts).toEqual(['and more', '2: last']);
+    expect(bot.logged.join('')).toContain('a reply could not be sent');
+    expect(bot.logged.join('')).toContain('a message could not be answered');
+  });
+
+  test('nothing is sent when what has to be kept could not be kept', async () => {
+    await using scene = await openScene();
+    const { api, rosa, serve } = scene;
+    const store = createMemoryStore();
+    let full = true;
+    serve({
+      state: {
+        load: (who) => store.load(who),
+        commit: (writes) => (full ? Promise.reject(new Error('the disk is full')) : store.commit(writes)),
+      },
+    });
+    rosa.sends('first');
+    await api.until(() => api.confirmed > 1001 || api.callsOf('getUpdates').length > 1);
+    full = false;
+    rosa.sends('second');
+    expect(await rosa.reads(1)).toBe('1: second');
+  });
+});

@@ -1,0 +1,54 @@
+import { createMemoryStore } from '../../../src/edge/store/memory.ts';
+import { createLog } from '../../../src/edge/logging.ts';
+import { systemClock, type Clock } from '../../../src/edge/clock.ts';
+import { serveTelegram, type TelegramOptions } from '../../../src/edge/telegram/serve-telegram.ts';
+import { TOKEN } from './fake-bot-api.ts';
+import * as stub from './stub-conversation.ts';
+
+/** A clock on which a second passes in a millisecond. */
+export const hastyClock: Clock = {
+  now: () => 1_767_000_100_000,
+  wait: (ms, signal) => systemClock.wait(ms / 1000, signal),
+};
+
+/** A bot at work in this process. */
+export interface ServedBot {
+  /** What the operator was told. */
+  readonly told: string[];
+  /** Every line of the log. */
+  readonly logged: string[];
+  /** Asks it to stop, as SIGTERM does, and resolves when it has; rejects with what it ended with. */
+  stop(): Promise<void>;
+  /** Resolves or rejects when it ends by itself. */
+  readonly ended: Promise<void>;
+}
+
+/** Serves the fake platform at `root` with the stub conversation, unless another is handed in. */
+export function serveBot(root: string, changes: Partial<TelegramOptions> = {}): ServedBot {
+  const told: string[] = [];
+  const logged: string[] = [];
+  const stopping = new AbortController();
+  const ended = serveTelegram({
+    ...stub,
+    state: createMemoryStore(),
+    log: createLog({ level: 'trace', secret: TOKEN, to: { write: (line) => void logged.push(line) } }),
+    clock: hastyClock,
+    config: { botToken: TOKEN, botApiRoot: root },
+    tell: (sentence) => void told.push(sentence),
+    signal: stopping.signal,
+    ...changes,
+    // Long on the hasty clock, so that only the tests that want them see them end.
+    times: { callTimeout_s: 20, watchdog_s: 1e6, finish_s: 1e4, confirm_s: 1e4, ...changes.times },
+  });
+  // A test that expects it to end badly looks at it later.
+  ended.catch(() => undefined);
+  return {
+    told,
+    logged,
+    ended,
+    stop: () => {
+      stopping.abort();
+      return ended;
+    },
+  };
+}

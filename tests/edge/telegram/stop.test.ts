@@ -1,0 +1,73 @@
+import { describe, expect, test } from 'vitest';
+
+import type { Fault } from './fake-bot-api.ts';
+import { SERVER_ERROR } from './fault.ts';
+import { openScene } from './scene.ts';
+
+describe('a stop', () => {
+  test('finishes what is in hand, and tells the platform what was received', async () => {
+    await using scene = await openScene();
+    const { api, rosa, serve } = scene;
+    api.fail('sendMessage', SERVER_ERROR, SERVER_ERROR, SERVER_ERROR);
+    const bot = serve();
+    rosa.sends('first');
+    rosa.sends('second');
+    await api.until(() => api.callsOf('sendMessage').length > 0);
+    await bot.stop();
+    expect(rosa.texts).toEqual(['1: first', '2: second']);
+    expect(api.confirmed).toBe(1003);
+  });
+
+  test('in the middle of anything ends with every message answered once by whoever comes next', async () => {
+    await using scene = await openScene();
+    const { api, rosa, serve } = scene;
+    for (const seen of [1, 3, 6]) {
+      const bot = serve();
+      for (let i = 0; i < 3; i += 1) rosa.sends('again');
+      await api.until(() => api.callsOf('sendMessage').length >= seen);
+      await bot.stop();
+    }
+    const bot = serve();
+    await rosa.reads(9);
+    await bot.stop();
+    expect(rosa.texts).toHaveLength(9);
+  });
+
+  test('does not wait for ever for what is in hand, and logs how much was left', async () => {
+    await using scene = await openScene();
+    const { api, rosa, serve } = scene;
+    api.fail('sendMessage', 'hang');
+    const bot = serve({ times: { finish_s: 50 } });
+    rosa.sends('first');
+    rosa.sends('second');
+    await api.until(() => api.callsOf('sendMessage').length > 0);
+    await bot.stop();
+    expect(rosa.texts).toEqual([]);
+    expect(bot.logged.join('')).toContain('"left":2');
+  });
+
+  test('leaves with the platform what it has not confirmed: the next one answers it', async () => {
+    await using scene = await openScene();
+    const { api, rosa, serve } = scene;
+    api.fail('sendMessage', 'hang');
+    api.fail('getUpdates', 'none', 'hang');
+    const early = serve({ times: { finish_s: 50 } });
+    rosa.sends('first');
+    rosa.sends('second');
+    await api.until(() => api.callsOf('sendMessage').length > 0 && api.callsOf('getUpdates').length > 1);
+    await early.stop();
+    serve();
+    await rosa.reads(2);
+    expect(rosa.texts).toEqual(['1: first', '2: second']);
+  });
+
+  test('does not wait for a platform that is away', async () => {
+    await using scene = await openScene();
+    const { api, serve } = scene;
+    api.fail('getMe', ...Array<Fault>(1000).fill('reset'));
+    const bot = serve();
+    await api.until(() => api.calls.length > 2);
+    await bot.stop();
+    expect(api.callsOf('getUpdates')).toEqual([]);
+  });
+});
