@@ -8,6 +8,7 @@ test('no message throws, nor gets a dose beside a problem, an amount without wha
     fc.property(anyTalk, (talk) => {
       for (const turn of play(talk)) expect(faults(turn)).toEqual([]);
     }),
-    { numRuns: 1500 },
+    // The same talks every time: the gate does not wander, `npm run fuzz` does.
+    { numRuns: 1500, seed: 20260914 },
   );
 });
