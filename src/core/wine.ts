@@ -15,9 +15,7 @@ export const STAGES_WITHOUT_TARGET: readonly Stage[] = ['must', 'fermenting', 'm
 
 /** What a person aims at: so much free, so much molecular, or a stated rise of free SO2; all in mg/L. */
 export type Target =
-  | { readonly free_mg_L: number }
-  | { readonly molecular_mg_L: number }
-  | { readonly add_mg_L: number };
+  { readonly free_mg_L: number } | { readonly molecular_mg_L: number } | { readonly add_mg_L: number };
 
 /** The table of dissociation constants a figure rests on. */
 export type Basis = 'pk-1.81' | 'oiv';

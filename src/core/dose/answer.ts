@@ -1,3 +1,4 @@
+import type { AdditiveId } from '../additives/additive-id.ts';
 import type { Basis, Target } from '../wine.ts';
 import type { Step } from '../working.ts';
 
@@ -15,7 +16,10 @@ export interface Amount {
   readonly tablets?: number;
 }
 
-/** An amount, what an instrument shows of it, and what that rounding changes in the wine (mg/L SO2). */
+/**
+ * An amount, what an instrument shows of it, and what that rounding changes in the wine
+ * (mg/L SO2; above 0 where the instrument shows more than the amount).
+ */
 export interface MeasuredAmount extends Amount {
   readonly measure: Measure;
   readonly rounding_mg_L: number;
@@ -51,7 +55,19 @@ export interface Warning {
   readonly values: Readonly<Record<string, number | string>>;
 }
 
-/** One way out where the first line of the reply is a choice and not a dose. */
+/** The share of one of several equal vessels. `measure` is absent below half a tablet: then `stock` is the way. */
+export interface PerVessel extends Amount {
+  readonly count: number;
+  readonly measure?: Measure;
+  readonly rounding_mg_L?: number;
+  readonly measure_gives_mg_L?: number;
+  readonly stock?: AsStock;
+}
+
+/**
+ * One way out where the first line of the reply is a choice and not a dose. An option that would pass the limit on
+ * file carries no amount and says `over_limit`.
+ */
 export interface DoseChoice extends Partial<MeasuredAmount> {
   /** Absent for "leave it as it is". */
   readonly target?: Target;
@@ -59,10 +75,16 @@ export interface DoseChoice extends Partial<MeasuredAmount> {
   readonly free_mg_L: number;
   readonly add_mg_L: number;
   readonly dose_mg_L: number;
+  readonly measure_gives_mg_L?: number;
+  readonly stock?: AsStock;
+  readonly per_vessel?: PerVessel;
+  readonly over_limit?: true;
 }
 
-/** The small amount once more, as millilitres of a stock solution of the same salt. */
+/** A small amount once more, or the rest of a dose in tablets, as millilitres of a stock solution of the salt. */
 export interface AsStock {
+  readonly additive: AdditiveId;
+  /** Grams of the powder in 100 mL. */
   readonly strength_percent: number;
   readonly additive_volume_mL: number;
   readonly measure: Measure;
@@ -75,7 +97,7 @@ export interface DoseAnswer extends Partial<MeasuredAmount> {
   readonly target_molecular_mg_L?: number;
   readonly add_mg_L?: number;
   readonly dose_mg_L?: number;
-  readonly per_vessel?: MeasuredAmount & { readonly count: number };
+  readonly per_vessel?: PerVessel;
   /** Under 5 g of powder, or the rest of a dose in tablets: the same as a 10 % stock. */
   readonly stock?: AsStock;
   /** mg/L of SO2 that `measure` gives where the rounding is worth a word (tablets). */

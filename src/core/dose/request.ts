@@ -1,4 +1,5 @@
 import type { AdditiveAtHand } from '../additives/additive-id.ts';
+import type { VolumeShown } from '../units/shown.ts';
 import type { Basis, Category, Product, Stage, Style, Target } from '../wine.ts';
 
 /** What is known of the wine. Units stand in the names; every one may be unknown. */
@@ -17,6 +18,8 @@ export interface WineFacts {
 /** A question for a dose. */
 export interface DoseRequest extends WineFacts {
   readonly volume_L?: number;
+  /** The same volume as the person wrote it, so that the working shows it so; must be equal to `volume_L`. */
+  readonly volume_display?: VolumeShown;
   /** How many equal vessels or barrels `volume_L` is the sum of, where a reading names several. */
   readonly vessels?: number;
   /** The additive; absent when its name, strength or size is still asked, so that no amount is given. */
@@ -49,6 +52,7 @@ export interface StatedAmount {
 /** A question for what an amount does. */
 export interface EffectRequest extends WineFacts, StatedAmount {
   readonly volume_L?: number;
+  readonly volume_display?: VolumeShown;
   readonly additive?: AdditiveAtHand;
   readonly stage: Stage;
   readonly stageStated: boolean;
@@ -60,12 +64,15 @@ export interface EffectRequest extends WineFacts, StatedAmount {
 /** An addition that was made. */
 export interface AddedRequest extends StatedAmount {
   readonly volume_L?: number;
+  readonly volume_display?: VolumeShown;
   readonly additive?: AdditiveAtHand;
 }
 
-/** A stock of salt in water: a volume and either its strength or the grams of salt that go in. */
+/** A stock in water: its volume, and either its strength or what goes in (grams of salt, mL of a stronger solution). */
 export interface SolutionRequest {
   readonly volume_L: number;
+  readonly volume_display?: VolumeShown;
   readonly additive: AdditiveAtHand;
   readonly mass_g?: number;
+  readonly additive_volume_mL?: number;
 }

@@ -1,0 +1,53 @@
+import { molecularSO2 } from '../chemistry/molecular-so2.ts';
+import type { Target } from '../wine.ts';
+import { aimAt } from './aim.ts';
+import type { DoseChoice } from './answer.ts';
+import { portionOf } from './portion.ts';
+import type { DoseRequest } from './request.ts';
+import { standingAfter, type RoomToLimit } from './room-to-limit.ts';
+import { FREE_NEED_HIGH_mg_L } from './thresholds.ts';
+
+/**
+ * The ways out where the need is high and nobody stated the target: leave it, go to 60 mg/L free, the full target.
+ * One whose free or predicted total SO2 passes the limit on file carries no amount.
+ *
+ * @param request with pH and free SO2
+ * @param full the target in full
+ * @param pK from `dissociation`
+ * @param room how far the limit is
+ *
+ * @example
+ * ```ts
+ * choicesFor(
+ *   { ph: 4.1, free_mg_L: 45, stage: 'finished', stageStated: true, targetStated: false, basis: 'pk-1.81' },
+ *   { molecular_mg_L: 0.6 },
+ *   1.81,
+ *   { found: { noneFor: 'cider' }, least_total_mg_L: 45, totalKnown: false },
+ * ).map((choice) => choice.add_mg_L) // => [0, 15, 72.6]
+ * ```
+ */
+export function choicesFor(
+  request: DoseRequest,
+  full: Target,
+  pK: number,
+  room: RoomToLimit,
+): readonly DoseChoice[] {
+  const { ph, free_mg_L } = request;
+  if (ph === undefined || free_mg_L === undefined) return [];
+  const choice = (target?: Target): DoseChoice => {
+    const aim = target === undefined ? undefined : aimAt(target, request, pK);
+    const add_mg_L = aim?.add_mg_L ?? 0;
+    const dose_mg_L = aim?.dose_mg_L ?? 0;
+    const over = dose_mg_L > 0 && standingAfter(room, dose_mg_L) === 'over';
+    return {
+      ...(target === undefined ? {} : { target }),
+      molecular_mg_L: molecularSO2(free_mg_L + add_mg_L, ph, pK),
+      free_mg_L: free_mg_L + add_mg_L,
+      add_mg_L,
+      dose_mg_L,
+      ...(over ? { over_limit: true } : portionOf(request, dose_mg_L, room.ceiling_mg_L)?.shown),
+    };
+  };
+  const to60 = free_mg_L < FREE_NEED_HIGH_mg_L ? [choice({ free_mg_L: FREE_NEED_HIGH_mg_L })] : [];
+  return [choice(), ...to60, choice(full)];
+}

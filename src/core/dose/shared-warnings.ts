@@ -1,0 +1,112 @@
+import { PH_USUAL } from '../bounds.ts';
+import type { AdditiveAtHand } from '../additives/additive-id.ts';
+import { STAGES_WITHOUT_TARGET, type Stage } from '../wine.ts';
+import { FREE_LOW_mg_L } from '../binding/free-expected.ts';
+import type { Warning } from './answer.ts';
+import { standingAfter, type RoomToLimit } from './room-to-limit.ts';
+import { ADDITION_LARGE_mg_L, MALOLACTIC_CEILINGS, MOLECULAR_SMELT_mg_L } from './thresholds.ts';
+
+/**
+ * That no dose belongs to this stage, with the published ceilings where malolactic fermentation is to come.
+ *
+ * @example
+ * ```ts
+ * stageWarnings('must') // => [{ code: 'no-dose-at-this-stage', values: { stage: 'must' } }]
+ * stageWarnings('finished') // => []
+ * ```
+ */
+export function stageWarnings(stage: Stage): readonly Warning[] {
+  if (!STAGES_WITHOUT_TARGET.includes(stage)) return [];
+  const ceilings = stage === 'malolactic' ? MALOLACTIC_CEILINGS : {};
+  return [{ code: 'no-dose-at-this-stage', values: { stage, ...ceilings } }];
+}
+
+/**
+ * What the pH and the additive call for.
+ *
+ * @example
+ * ```ts
+ * factWarnings({ ph: 4.3 }) // => [{ code: 'ph-unusual', values: { ph: 4.3 } }]
+ * ```
+ */
+export function factWarnings(facts: {
+  readonly ph?: number;
+  readonly additive?: AdditiveAtHand;
+}): readonly Warning[] {
+  const warnings: Warning[] = [];
+  const { ph, additive } = facts;
+  if (ph !== undefined && (ph < PH_USUAL.min || ph > PH_USUAL.max)) {
+    warnings.push({ code: 'ph-unusual', values: { ph } });
+  }
+  if (additive?.id === 'sulfur-dioxide-gas') warnings.push({ code: 'gas-needs-training', values: {} });
+  return warnings;
+}
+
+/** What an addition makes of a wine; mg/L. */
+export interface Addition {
+  readonly dose_mg_L: number;
+  readonly free_mg_L?: number;
+  readonly free_after_mg_L?: number;
+  readonly molecular_mg_L?: number;
+  readonly molecular_after_mg_L?: number;
+}
+
+/**
+ * What an addition calls for, whoever chose it: size, smell, binding, limit.
+ *
+ * @example
+ * ```ts
+ * additionWarnings({ dose_mg_L: 120 }, { found: { noneFor: 'mead' }, least_total_mg_L: 0, totalKnown: true }).map((warning) => warning.code) // => ['addition-large', 'no-limit-on-file']
+ * ```
+ */
+export function additionWarnings(addition: Addition, room: RoomToLimit): readonly Warning[] {
+  const { dose_mg_L, free_mg_L, free_after_mg_L } = addition;
+  const warnings: Warning[] = [];
+  if (dose_mg_L > ADDITION_LARGE_mg_L) warnings.push({ code: 'addition-large', values: { dose_mg_L } });
+  if (free_mg_L !== undefined && free_mg_L < FREE_LOW_mg_L && dose_mg_L > 0) {
+    warnings.push({ code: 'free-low-may-bind-all', values: { free_mg_L } });
+  }
+  warnings.push(...smellWarnings(addition));
+  const { limit, noneFor } = room.found;
+  if (limit === undefined) return [...warnings, { code: 'no-limit-on-file', values: { none_for: noneFor } }];
+  const standing = standingAfter(room, dose_mg_L);
+  if (standing !== 'within') {
+    warnings.push({
+      code: standing === 'over' ? 'total-over-limit' : 'total-near-limit',
+      values: {
+        rule: limit.rule,
+        limit_mg_L: limit.limit_mg_L,
+        total_after_mg_L: room.least_total_mg_L + dose_mg_L,
+        total: room.totalKnown ? 'known' : 'at-least',
+      },
+    });
+  }
+  if (!room.totalKnown && free_after_mg_L !== undefined) {
+    warnings.push({ code: 'total-unknown', values: { free_after_mg_L, limit_mg_L: limit.limit_mg_L } });
+  }
+  return warnings;
+}
+
+/**
+ * That molecular SO2 is, or will be, above what is smelt.
+ *
+ * @example
+ * ```ts
+ * smellWarnings({ molecular_after_mg_L: 2.1 }) // => [{ code: 'molecular-above-2', values: { molecular_after_mg_L: 2.1 } }]
+ * ```
+ */
+export function smellWarnings(
+  addition: Pick<Addition, 'molecular_mg_L' | 'molecular_after_mg_L'>,
+): readonly Warning[] {
+  const { molecular_mg_L, molecular_after_mg_L } = addition;
+  if (Math.max(molecular_mg_L ?? 0, molecular_after_mg_L ?? 0) <= MOLECULAR_SMELT_mg_L) return [];
+  return [
+    {
+      code: 'molecular-above-2',
+      values: {
+        ...(molecular_mg_L === undefined ? {} : { molecular_mg_L }),
+        ...(molecular_after_mg_L === undefined ? {} : { molecular_after_mg_L }),
+      },
+    },
+  ];
+}

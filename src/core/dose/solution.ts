@@ -1,0 +1,117 @@
+import type { AdditiveAtHand } from '../additives/additive-id.ts';
+import { ADDITIVES } from '../additives/additives.ts';
+import { SO2ContentOf, SO2Per } from '../additives/so2-content.ts';
+import { SO2In } from '../additives/so2-in.ts';
+import { assertWithinBounds } from '../bounds.ts';
+import { shown } from '../units/shown.ts';
+import { over, times, type Step } from '../working.ts';
+import type { SolutionAnswer } from './answer.ts';
+import { effectSteps } from './effect-steps.ts';
+import { line, printAlike, withEnoughDigits } from './line.ts';
+import type { SolutionRequest } from './request.ts';
+import { measureOf, toStep } from './rounding.ts';
+import { contentTerm, volumeTerm } from './terms.ts';
+
+const mL_of = (volume_L: number): number => volume_L * 1000;
+
+/** A stock of a stated strength: what salt to weigh, filled up to the volume. */
+function byStrength(request: SolutionRequest): SolutionAnswer {
+  const { volume_L, additive } = request;
+  const content = SO2ContentOf(additive);
+  if (content === undefined || content.per !== 'mL') {
+    throw new TypeError(
+      'Cannot make up a solution as it needs a strength, a mass or a volume of additive: none is given',
+    );
+  }
+  const strength_SO2_g_per_100_mL = 100 * SO2Per(content);
+  const whole = { volume_L, strength_SO2_g_per_100_mL };
+  const perHundred = content.of === 'salt-solution' ? content.salt_g_per_100_mL : undefined;
+  const isWeighed = ADDITIVES[additive.id].formula.endsWith('S2O5');
+  if (perHundred === undefined || !isWeighed) return { ...whole, steps: [] };
+  const salt_g = (perHundred / 100) * mL_of(volume_L);
+  const rounded = measureOf(salt_g, 'scale');
+  const make = (digits: number) => {
+    const volume = volumeTerm(volume_L, request.volume_display, digits);
+    const perMillilitre = over(shown(perHundred, 'g'), shown(100, 'mL'));
+    const strength = contentTerm(content, digits);
+    const salt = line('salt-mass', times(perMillilitre, volume), 'g', digits);
+    // In grams per 100 mL the figure is what 100 mL hold, in grams.
+    const SO2 =
+      strength === undefined
+        ? []
+        : [line('solution-strength-by-salt', times(shown(100, 'mL'), strength), 'g', digits)];
+    return { salt, SO2 };
+  };
+  const made = withEnoughDigits(
+    make,
+    ({ salt }) => toStep(salt.step.result.value, rounded.step) === toStep(salt_g, rounded.step),
+  );
+  const steps: readonly Step[] = [...made.SO2.map(({ step }) => step), made.salt.step];
+  return { salt_g, ...whole, measure: rounded.measure, steps };
+}
+
+/** A stock of what is said to go in: how strong it is. */
+function byAmount(request: SolutionRequest, additive: AdditiveAtHand): SolutionAnswer {
+  const { volume_L, mass_g, additive_volume_mL } = request;
+  const SO2_g = SO2In(request, additive);
+  if (SO2_g === undefined) {
+    throw new TypeError('Cannot make up a solution as the SO2 in what goes in is unknown');
+  }
+  const strength_SO2_g_per_100_mL = (100 * SO2_g) / mL_of(volume_L);
+  const rounded = measureOf(mass_g ?? additive_volume_mL ?? 0, mass_g === undefined ? 'cylinder' : 'scale');
+  const content = SO2ContentOf(additive);
+  const [first] = effectSteps({
+    request: { ...request, additive },
+    ...(content === undefined ? {} : { content }),
+    leadsTo: undefined,
+  });
+  const strength = withEnoughDigits(
+    (digits) => {
+      const SO2 = shown(first?.result.value ?? SO2_g, 'g', digits);
+      const volume = volumeTerm(volume_L, request.volume_display, digits);
+      return line('solution-strength', times(over(SO2, volume), shown(100, 'mL')), 'g', digits);
+    },
+    ({ step }) => printAlike(step.result.value, strength_SO2_g_per_100_mL),
+  );
+  return {
+    ...(mass_g === undefined ? {} : { salt_g: mass_g }),
+    ...(additive_volume_mL === undefined ? {} : { additive_volume_mL }),
+    volume_L,
+    strength_SO2_g_per_100_mL,
+    measure: rounded.measure,
+    steps: [...(first === undefined ? [] : [first]), strength.step],
+  };
+}
+
+/**
+ * A stock in water: what to weigh and fill up to the volume, and its strength in grams of SO2 per 100 mL; or, where
+ * it is said what goes in, the strength that this gives. Only metabisulfite is weighed; of other solutions the answer
+ * is the strength alone.
+ *
+ * @param request volume in L; additive with its strength (grams per 100 mL), or a mass in g, or mL of a stronger solution
+ * @throws RangeError for figures outside `BOUNDS`; TypeError where neither strength nor amount is given
+ *
+ * Source: shares of SO2 from `additives`.
+ *
+ * @example
+ * ```ts
+ * solution({ volume_L: 5, additive: { id: 'potassium-metabisulfite-solution', strength_percent: 10 } }).salt_g // => 500
+ * solution({ volume_L: 0.1, mass_g: 10, additive: { id: 'potassium-metabisulfite' } }).strength_SO2_g_per_100_mL // => 5.7629
+ * ```
+ */
+export function solution(request: SolutionRequest): SolutionAnswer {
+  assertWithinBounds('make up a solution', 'volume_L', request.volume_L);
+  assertWithinBounds('make up a solution', 'mass_g', request.mass_g);
+  assertWithinBounds('make up a solution', 'additive_volume_mL', request.additive_volume_mL);
+  const { additive, mass_g, additive_volume_mL } = request;
+  if (mass_g === undefined && additive_volume_mL === undefined) return byStrength(request);
+  return byAmount(request, weighed(additive, mass_g));
+}
+
+/** Grams beside a metabisulfite "solution" are grams of the powder that goes in. */
+function weighed(additive: AdditiveAtHand, mass_g: number | undefined): AdditiveAtHand {
+  if (mass_g === undefined) return additive;
+  if (additive.id === 'potassium-metabisulfite-solution') return { id: 'potassium-metabisulfite' };
+  if (additive.id === 'sodium-metabisulfite-solution') return { id: 'sodium-metabisulfite' };
+  return additive;
+}

@@ -1,0 +1,75 @@
+import type { SourceKey } from './sources.ts';
+
+/** What is the same in every line of one name. */
+export interface StepKind {
+  readonly symbol: string;
+  readonly formula: string;
+  readonly source?: SourceKey;
+}
+
+/**
+ * The lines that a working can have. The name is the key of the line's sentence in the locales.
+ * Symbols: M molecular, F free, A wanted rise, D what goes in, S grams of SO2, m additive in grams,
+ * v additive in millilitres, n tablets, V wine.
+ */
+export const STEP_KINDS = {
+  dissociation: {
+    symbol: 'pK',
+    formula: 'between the four nearest values by alcohol and temperature',
+    source: 'oiv-as323-04c-table-2',
+  },
+  'molecular-now': { symbol: 'M', formula: 'free SO2 ÷ (10^(pH − pK) + 1)' },
+  'free-needed': { symbol: 'F', formula: 'target molecular SO2 × (10^(pH − pK) + 1)' },
+  addition: { symbol: 'A', formula: 'free SO2 wanted − free SO2 now' },
+  'dose-with-allowance': { symbol: 'D', formula: 'addition × (1 + allowance)' },
+  'dose-with-share': { symbol: 'D', formula: 'addition ÷ (1 − share that binds)' },
+  'so2-mass': { symbol: 'S', formula: 'SO2 that goes in × volume' },
+  'so2-mass-each': { symbol: 'S', formula: 'SO2 that goes in × volume of one vessel' },
+  'all-vessels': { symbol: 'm', formula: 'amount for one vessel × number of vessels' },
+  'additive-mass': { symbol: 'm', formula: 'SO2 ÷ share of SO2 in the additive', source: 'ciaaw-2021' },
+  'additive-mass-by-assay': {
+    symbol: 'm',
+    formula: 'SO2 ÷ (assay of the powder × share of SO2 in the pure salt)',
+    source: 'ciaaw-2021',
+  },
+  'additive-mass-by-yield': { symbol: 'm', formula: 'SO2 ÷ stated SO2 yield of the powder', source: 'label' },
+  'additive-volume-by-salt': {
+    symbol: 'v',
+    formula: 'SO2 ÷ (salt in the solution × share of SO2 in the salt)',
+    source: 'ciaaw-2021',
+  },
+  'additive-volume-by-so2': { symbol: 'v', formula: 'SO2 ÷ SO2 in the solution', source: 'label' },
+  'tablets-by-so2': { symbol: 'n', formula: 'SO2 ÷ SO2 that one tablet gives', source: 'label' },
+  'tablets-by-salt': {
+    symbol: 'n',
+    formula: 'SO2 ÷ (salt in one tablet × share of SO2 in the salt)',
+    source: 'ciaaw-2021',
+  },
+  'gas-by-purity': { symbol: 'm', formula: 'SO2 ÷ purity of the gas', source: 'label' },
+  'so2-in-amount': { symbol: 'S', formula: 'amount of additive × SO2 in it' },
+  'added-concentration': { symbol: 'A', formula: 'SO2 ÷ volume' },
+  'added-by-rate': { symbol: 'A', formula: 'rate of additive × share of SO2 in it' },
+  'mass-by-rate': { symbol: 'm', formula: 'rate of additive × volume' },
+  'free-after': { symbol: 'F', formula: 'free SO2 now + SO2 that goes in' },
+  'molecular-after': { symbol: 'M', formula: 'free SO2 after ÷ (10^(pH − pK) + 1)' },
+  'salt-mass': { symbol: 'm', formula: 'wanted strength × volume' },
+  'solution-strength': { symbol: 'c', formula: 'SO2 that goes in ÷ volume of the solution' },
+  'solution-strength-by-salt': {
+    symbol: 'c',
+    formula: 'salt in the solution × share of SO2 in the salt',
+    source: 'ciaaw-2021',
+  },
+} as const satisfies Readonly<Record<string, StepKind>>;
+
+/** Which line of a working. */
+export type StepName = keyof typeof STEP_KINDS;
+
+/**
+ * All names, so that the locales can be checked against them.
+ *
+ * @example
+ * ```ts
+ * STEP_NAMES.includes('free-needed') // => true
+ * ```
+ */
+export const STEP_NAMES = Object.keys(STEP_KINDS) as readonly StepName[];
