@@ -139,7 +139,8 @@ export interface SolutionAnswer {
   readonly salt_g?: number;
   readonly additive_volume_mL?: number;
   readonly volume_L: number;
-  readonly strength_SO2_g_per_100_mL: number;
+  /** Absent where it does not follow (a solution by its mass). */
+  readonly strength_SO2_g_per_100_mL?: number;
   readonly measure?: Measure;
   readonly steps: readonly Step[];
 }

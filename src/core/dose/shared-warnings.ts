@@ -67,10 +67,15 @@ export function additionWarnings(addition: Addition, room: RoomToLimit): readonl
     warnings.push({ code: 'free-low-may-bind-all', values: { free_mg_L } });
   }
   warnings.push(...smellWarnings(addition));
+  return [...warnings, ...totalWarnings(room, dose_mg_L, free_after_mg_L)];
+}
+
+function totalWarnings(room: RoomToLimit, dose_mg_L: number, free_after_mg_L?: number): readonly Warning[] {
   const { limit, noneFor } = room.found;
-  if (limit === undefined) return [...warnings, { code: 'no-limit-on-file', values: { none_for: noneFor } }];
+  const warnings: Warning[] = [];
   const standing = standingAfter(room, dose_mg_L);
-  if (standing !== 'within') {
+  if (limit === undefined) warnings.push({ code: 'no-limit-on-file', values: { none_for: noneFor } });
+  else if (standing !== 'within') {
     warnings.push({
       code: standing === 'over' ? 'total-over-limit' : 'total-near-limit',
       values: {
@@ -81,8 +86,14 @@ export function additionWarnings(addition: Addition, room: RoomToLimit): readonl
       },
     });
   }
-  if (!room.totalKnown && free_after_mg_L !== undefined) {
-    warnings.push({ code: 'total-unknown', values: { free_after_mg_L, limit_mg_L: limit.limit_mg_L } });
+  if (!room.totalKnown) {
+    warnings.push({
+      code: 'total-unknown',
+      values: {
+        ...(free_after_mg_L === undefined ? {} : { free_after_mg_L }),
+        ...(limit === undefined ? {} : { limit_mg_L: limit.limit_mg_L }),
+      },
+    });
   }
   return warnings;
 }

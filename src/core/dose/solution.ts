@@ -18,11 +18,7 @@ const mL_of = (volume_L: number): number => volume_L * 1000;
 function byStrength(request: SolutionRequest): SolutionAnswer {
   const { volume_L, additive } = request;
   const content = SO2ContentOf(additive);
-  if (content === undefined || content.per !== 'mL') {
-    throw new TypeError(
-      'Cannot make up a solution as it needs a strength, a mass or a volume of additive: none is given',
-    );
-  }
+  if (content === undefined || content.per !== 'mL') return { volume_L, steps: [] };
   const strength_SO2_g_per_100_mL = 100 * SO2Per(content);
   const whole = { volume_L, strength_SO2_g_per_100_mL };
   const perHundred = content.of === 'salt-solution' ? content.salt_g_per_100_mL : undefined;
@@ -53,10 +49,12 @@ function byStrength(request: SolutionRequest): SolutionAnswer {
 /** A stock of what is said to go in: how strong it is. */
 function byAmount(request: SolutionRequest, additive: AdditiveAtHand): SolutionAnswer {
   const { volume_L, mass_g, additive_volume_mL } = request;
+  const amount = {
+    ...(mass_g === undefined ? {} : { salt_g: mass_g }),
+    ...(additive_volume_mL === undefined ? {} : { additive_volume_mL }),
+  };
   const SO2_g = SO2In(request, additive);
-  if (SO2_g === undefined) {
-    throw new TypeError('Cannot make up a solution as the SO2 in what goes in is unknown');
-  }
+  if (SO2_g === undefined) return { ...amount, volume_L, steps: [] };
   const strength_SO2_g_per_100_mL = (100 * SO2_g) / mL_of(volume_L);
   const rounded = measureOf(mass_g ?? additive_volume_mL ?? 0, mass_g === undefined ? 'cylinder' : 'scale');
   const content = SO2ContentOf(additive);
@@ -74,8 +72,7 @@ function byAmount(request: SolutionRequest, additive: AdditiveAtHand): SolutionA
     ({ step }) => printAlike(step.result.value, strength_SO2_g_per_100_mL),
   );
   return {
-    ...(mass_g === undefined ? {} : { salt_g: mass_g }),
-    ...(additive_volume_mL === undefined ? {} : { additive_volume_mL }),
+    ...amount,
     volume_L,
     strength_SO2_g_per_100_mL,
     measure: rounded.measure,
@@ -86,10 +83,10 @@ function byAmount(request: SolutionRequest, additive: AdditiveAtHand): SolutionA
 /**
  * A stock in water: what to weigh and fill up to the volume, and its strength in grams of SO2 per 100 mL; or, where
  * it is said what goes in, the strength that this gives. Only metabisulfite is weighed; of other solutions the answer
- * is the strength alone.
+ * is the strength alone; where neither strength nor amount is known, no figure.
  *
  * @param request volume in L; additive with its strength (grams per 100 mL), or a mass in g, or mL of a stronger solution
- * @throws RangeError for figures outside `BOUNDS`; TypeError where neither strength nor amount is given
+ * @throws RangeError for figures outside `BOUNDS`
  *
  * Source: shares of SO2 from `additives`.
  *

@@ -1,6 +1,6 @@
 import { termOf, type Term } from '../working.ts';
 import { GRAMS_IN } from './mass.ts';
-import { LITRES_IN, VOLUME_UNITS } from './volume.ts';
+import { LITRES_IN, type VolumeUnitId } from './volume.ts';
 
 /** Milligrams, litres, mg/L or ones in each unit that a working may show. */
 export const SHOWN_UNITS = {
@@ -15,7 +15,7 @@ export type ShownUnit = keyof typeof SHOWN_UNITS;
 /** A volume as the person wrote it: the working then shows it so. `value` in `unit`. */
 export interface VolumeShown {
   readonly value: number;
-  readonly unit: (typeof VOLUME_UNITS)[number];
+  readonly unit: VolumeUnitId;
 }
 
 /**
