@@ -52,12 +52,14 @@ const VARIABLES = z.object({
 });
 
 /**
- * Reads the configuration from the environment. A variable that is empty counts as not set.
+ * Reads the configuration from the environment. Blanks around a value are dropped, and an
+ * empty one counts as not set.
  *
  * @throws OperatorError with one sentence for each variable that is wrong.
  */
 export function readConfig(environment: Environment): Config {
-  const filled = Object.fromEntries(Object.entries(environment).filter(([, value]) => value?.trim()));
+  const trimmed = Object.entries(environment).map(([name, value]) => [name, value?.trim()] as const);
+  const filled = Object.fromEntries(trimmed.filter(([, value]) => value));
   const read = VARIABLES.safeParse(filled);
   if (!read.success) throw new OperatorError(read.error.issues.map((issue) => issue.message).join('\n'));
   const { BOT_TOKEN, BOT_API_ROOT, LOG_LEVEL } = read.data;

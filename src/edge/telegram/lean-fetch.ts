@@ -35,8 +35,8 @@ interface HttpModule {
 const MOST_CONNECTIONS = 64;
 
 /**
- * Makes a `fetch` over kept-alive connections of `node:http` and `node:https`. It costs about a third of what the
- * client's own one does. The modules are taken at the call, as they load slowly, and as a test may replace them.
+ * Makes a `fetch` over kept-alive connections of `node:http` and `node:https`: most of what an answer costs is the
+ * client's own one. The modules are taken at the call, as they load slowly, and as a test may replace them.
  */
 export function createLeanFetch(): LeanFetch {
   const agents = new Map<string, Agent>();
@@ -56,7 +56,11 @@ export function createLeanFetch(): LeanFetch {
       if (signal?.aborted === true) return reject(new NoAnswer('the call was given up'));
       const options: RequestOptions = { method, headers, agent: agentOf(url.protocol) };
       const request = moduleOf(url.protocol).request(url, options);
-      const giveUp = (): void => void request.destroy(new NoAnswer('the call was given up'));
+      const giveUp = (): void => {
+        const reason = new NoAnswer('the call was given up');
+        request.destroy(reason);
+        reject(reason);
+      };
       const settle = (): void => signal?.removeEventListener('abort', giveUp);
       signal?.addEventListener('abort', giveUp);
       request.on('error', (error: NodeJS.ErrnoException) => {

@@ -36,13 +36,11 @@ const LONGEST_RETRY_AFTER_S = 300;
 
 /** Opens the way to the Bot API; no call is made yet. */
 export function openPlatform({ token, root, callTimeout_s, clock }: PlatformOptions): Platform {
-  const fetch = createLeanFetch();
-  const client = {
-    apiRoot: root,
-    timeoutSeconds: callTimeout_s,
-    fetch,
-  };
-  const patient = new Api(token, client);
+  // Connections of their own for each, so that replies that hang never keep a poll from being made.
+  const fetches = [createLeanFetch(), createLeanFetch()] as const;
+  const [once, patient] = fetches.map(
+    (fetch) => new Api(token, { apiRoot: root, timeoutSeconds: callTimeout_s, fetch }),
+  ) as [Api, Api];
   // auto-retry obeys `retry_after` only: its waits for a lost connection have no bound.
   patient.config.use(
     retryUnreached(clock),
@@ -53,5 +51,5 @@ export function openPlatform({ token, root, callTimeout_s, clock }: PlatformOpti
       rethrowInternalServerErrors: true,
     }),
   );
-  return { once: new Api(token, client), patient, close: () => fetch.close() };
+  return { once, patient, close: () => fetches.forEach((fetch) => fetch.close()) };
 }

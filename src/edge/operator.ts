@@ -1,0 +1,33 @@
+import { hideSecret } from './hide-secret.ts';
+import { EXIT, OperatorError } from './operator-error.ts';
+
+/** Whoever runs the program: plain sentences on stderr, and the exit status. */
+export interface Operator {
+  /** Shows a sentence. */
+  tell(sentence: string): void;
+  /** Ends the process: with the sentence and status of an OperatorError, else with the trace of the fault. */
+  end(error: unknown): never;
+}
+
+/** Makes the way to the operator, on which the secret is never shown. */
+export function createOperator(secret: string | undefined): Operator {
+  const hide = hideSecret(secret);
+  const tell = (sentence: string): void => void process.stderr.write(`${hide(sentence)}\n`);
+  return {
+    tell,
+    end: (error) => {
+      if (error instanceof OperatorError) {
+        tell(error.message);
+        process.exit(error.exitStatus);
+      }
+      tell(`brimnote stopped by a fault of its own.\n${traceOf(error)}`);
+      process.exit(EXIT.software);
+    },
+  };
+}
+
+const traceOf = (error: unknown): string => {
+  if (!(error instanceof Error)) return String(error);
+  const cause = error.cause === undefined ? '' : `\ncaused by ${traceOf(error.cause)}`;
+  return `${error.stack ?? error.message}${cause}`;
+};
