@@ -70,6 +70,7 @@ export function isWithinBounds(field: BoundedField, value: number): boolean {
  * Refuses a value outside its bounds; an absent one passes.
  *
  * @param action what the caller wanted ("dose"), for the message
+ * @param value in the unit that the field's name carries
  * @throws RangeError naming action, value and bound
  *
  * @example

@@ -55,6 +55,8 @@ export function roundTo(value: number, digits: number): number {
 /**
  * The digits of a number without exponent, as mathjs and a pocket calculator take them.
  *
+ * @param value in any unit, finite
+ *
  * @example
  * ```ts
  * plainText(0.00000012) // => '0.00000012'

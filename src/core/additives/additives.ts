@@ -1,7 +1,7 @@
 import { SO2ShareOf, molarMass, type Composition } from '../chemistry/molar-mass.ts';
 import type { SourceKey } from '../sources.ts';
 import type { AdditiveId } from './additive-id.ts';
-import type { CautionId } from './cautions.ts';
+import { cautionsOf, type CautionId } from './cautions.ts';
 
 /** A strength that is usual in trade. `percent` means what the additive's strength means (`read-strength`). */
 export interface UsualStrength {
@@ -32,23 +32,12 @@ const KHSO3: Composition = { K: 1, H: 1, S: 1, O: 3 };
 const NH4HSO3: Composition = { N: 1, H: 5, S: 1, O: 3 };
 const SO2: Composition = { S: 1, O: 2 };
 
-const DRY: readonly CautionId[] = [
-  'ventilate',
-  'never-lean-in',
-  'gloves-goggles',
-  'no-acid-no-chlorine',
-  'asthma',
-];
-const ALWAYS: readonly CautionId[] = ['mix-and-measure-again', 'label-and-rules-first'];
-const DISSOLVED: readonly CautionId[] = [...DRY, 'foams-with-carbon-dioxide', ...ALWAYS];
-const POWDER: readonly CautionId[] = [...DRY, 'dissolve-first', 'foams-with-carbon-dioxide', ...ALWAYS];
-
 const row = (
   id: AdditiveId,
   kind: Additive['kind'],
   formula: string,
   composition: Composition,
-  more: Pick<Additive, 'contains' | 'usual' | 'cautions'>,
+  more: Pick<Additive, 'contains' | 'usual'>,
 ): Additive => ({
   id,
   kind,
@@ -56,6 +45,7 @@ const row = (
   composition,
   molar_mass_g_mol: molarMass(composition),
   SO2_share: SO2ShareOf(composition),
+  cautions: cautionsOf(id),
   ...more,
 });
 
@@ -77,22 +67,18 @@ export const ADDITIVES: Readonly<Record<AdditiveId, Additive>> = {
       { percent: 95, source: 'austrian-law' }, // least assay
       { percent: 57.6, source: 'usp-35' }, // greatest SO2 yield
     ],
-    cautions: POWDER,
   }),
   'sodium-metabisulfite': row('sodium-metabisulfite', 'powder', 'Na2S2O5', Na2S2O5, {
     contains: 'sodium',
     usual: [{ percent: 90, source: 'jecfa-1999' }], // least assay
-    cautions: POWDER,
   }),
   'potassium-metabisulfite-solution': row('potassium-metabisulfite-solution', 'solution', 'K2S2O5', K2S2O5, {
     contains: 'potassium',
     usual: [{ percent: 10, source: 'common-practice' }],
-    cautions: DISSOLVED,
   }),
   'sodium-metabisulfite-solution': row('sodium-metabisulfite-solution', 'solution', 'Na2S2O5', Na2S2O5, {
     contains: 'sodium',
     usual: [{ percent: 10, source: 'common-practice' }],
-    cautions: DISSOLVED,
   }),
   'potassium-bisulfite-solution': row('potassium-bisulfite-solution', 'solution', 'KHSO3', KHSO3, {
     contains: 'potassium',
@@ -100,27 +86,22 @@ export const ADDITIVES: Readonly<Record<AdditiveId, Additive>> = {
       { percent: 15, source: 'oiv-potbis' }, // 150 g/L SO2
       { percent: 20, source: 'oiv-oeno-646-2019' }, // 200 g/L SO2 at most
     ],
-    cautions: DISSOLVED,
   }),
   'ammonium-bisulfite-solution': row('ammonium-bisulfite-solution', 'solution', 'NH4HSO3', NH4HSO3, {
     contains: 'ammonium',
     usual: [{ percent: 40, source: 'common-practice' }],
-    cautions: ['grapes-and-must-only', ...DISSOLVED],
   }),
   'sulfur-dioxide-solution': row('sulfur-dioxide-solution', 'solution', 'SO2', SO2, {
     usual: [
       { percent: 5, source: 'oiv-oeno-46-2000' }, // 50 g/L at least
       { percent: 6, source: 'ifv-grid-2024' }, // 60 to 150 g/L
     ],
-    cautions: DISSOLVED,
   }),
   'sulfur-dioxide-gas': row('sulfur-dioxide-gas', 'gas', 'SO2', SO2, {
     usual: [{ percent: 99.9, source: 'ifv-grid-2024' }], // least purity
-    cautions: ['trained-people-with-breathing-apparatus', ...DRY, ...ALWAYS],
   }),
   tablet: row('tablet', 'tablet', 'K2S2O5', K2S2O5, {
     contains: 'potassium',
     usual: [], // a tablet is known by the grams of SO2 that it gives
-    cautions: [...DRY, 'foams-with-carbon-dioxide', ...ALWAYS],
   }),
 };

@@ -1,5 +1,4 @@
 import type { AdditiveId } from './additive-id.ts';
-import { ADDITIVES } from './additives.ts';
 
 /**
  * What to beware of, by id; the sentences are the locales'. Sources: International Chemical Safety Cards 0074, 1134,
@@ -26,6 +25,29 @@ export const CAUTION_IDS = [
 ] as const;
 export type CautionId = (typeof CAUTION_IDS)[number];
 
+const AROUND: readonly CautionId[] = [
+  'ventilate',
+  'never-lean-in',
+  'gloves-goggles',
+  'no-acid-no-chlorine',
+  'asthma',
+];
+const AFTER: readonly CautionId[] = ['mix-and-measure-again', 'label-and-rules-first'];
+const POWDER: readonly CautionId[] = [...AROUND, 'dissolve-first', 'foams-with-carbon-dioxide', ...AFTER];
+const DISSOLVED: readonly CautionId[] = [...AROUND, 'foams-with-carbon-dioxide', ...AFTER];
+
+const CAUTIONS: Readonly<Record<AdditiveId, readonly CautionId[]>> = {
+  'potassium-metabisulfite': POWDER,
+  'sodium-metabisulfite': POWDER,
+  'potassium-metabisulfite-solution': DISSOLVED,
+  'sodium-metabisulfite-solution': DISSOLVED,
+  'potassium-bisulfite-solution': DISSOLVED,
+  'ammonium-bisulfite-solution': ['grapes-and-must-only', ...DISSOLVED],
+  'sulfur-dioxide-solution': DISSOLVED,
+  'sulfur-dioxide-gas': ['trained-people-with-breathing-apparatus', ...AROUND, ...AFTER],
+  tablet: DISSOLVED,
+};
+
 /**
  * The cautions that go with an additive, in the order to show them.
  *
@@ -35,5 +57,5 @@ export type CautionId = (typeof CAUTION_IDS)[number];
  * ```
  */
 export function cautionsOf(id: AdditiveId): readonly CautionId[] {
-  return ADDITIVES[id].cautions;
+  return CAUTIONS[id];
 }

@@ -15,7 +15,7 @@ interface Range {
   readonly min: number;
   readonly max: number;
   readonly kind: StrengthKind;
-  /** Above this a bare figure could mean two things. */
+  /** Above so many per cent (g per 100 mL) a bare figure could mean two things. */
   readonly clearUpTo?: number;
 }
 

@@ -9,9 +9,9 @@ import { readStrength } from './read-strength.ts';
  */
 export type SO2Content =
   | { readonly of: 'salt'; readonly per: 'g'; readonly share: number }
-  | { readonly of: 'assay'; readonly per: 'g'; readonly share: number; readonly assay: number }
+  | { readonly of: 'assay'; readonly per: 'g'; readonly share: number; readonly assay_share: number }
   | { readonly of: 'yield'; readonly per: 'g'; readonly fraction: number }
-  | { readonly of: 'gas'; readonly per: 'g'; readonly purity: number }
+  | { readonly of: 'gas'; readonly per: 'g'; readonly purity_share: number }
   | {
       readonly of: 'salt-solution';
       readonly per: 'mL';
@@ -34,7 +34,7 @@ function ofPowder(additive: AdditiveAtHand): SO2Content {
   const fraction = additive.strength_percent / 100;
   return kindOf(additive) === 'SO2-yield'
     ? { of: 'yield', per: 'g', fraction }
-    : { of: 'assay', per: 'g', share, assay: fraction };
+    : { of: 'assay', per: 'g', share, assay_share: fraction };
 }
 
 function kindOf(additive: AdditiveAtHand): string {
@@ -70,9 +70,9 @@ export function SO2ContentOf(additive: AdditiveAtHand): SO2Content | undefined {
     return { of: 'SO2-tablet', per: 'tablet', SO2_g: additive.tablet_SO2_g };
   }
   if (kind === 'gas') {
-    if (additive.strength_percent === undefined) return { of: 'gas', per: 'g', purity: 1 };
+    if (additive.strength_percent === undefined) return { of: 'gas', per: 'g', purity_share: 1 };
     kindOf(additive);
-    return { of: 'gas', per: 'g', purity: additive.strength_percent / 100 };
+    return { of: 'gas', per: 'g', purity_share: additive.strength_percent / 100 };
   }
   if (kind === 'powder') {
     const powder = ofPowder(additive);
@@ -99,11 +99,11 @@ export function SO2Per(content: SO2Content): number {
     case 'salt':
       return content.share;
     case 'assay':
-      return content.share * content.assay;
+      return content.share * content.assay_share;
     case 'yield':
       return content.fraction;
     case 'gas':
-      return content.purity;
+      return content.purity_share;
     case 'salt-solution':
       return (content.salt_g_per_100_mL / 100) * content.share;
     case 'SO2-solution':

@@ -20,7 +20,7 @@ import type { AddedRequest } from './request.ts';
  *
  * @example
  * ```ts
- * added({ mass_g: 82, additive: { id: 'potassium-metabisulfite' } }).SO2_g // => 47.2559
+ * added({ mass_g: 82, additive: { id: 'potassium-metabisulfite' } }).SO2_g // => 47.2558
  * added({ added_mg_L: 26, volume_L: 1000, additive: { id: 'potassium-metabisulfite' } }).mass_g // => 45.116
  * added({ added_mg_L: 26 }) // => { added_mg_L: 26, steps: [] }
  * ```

@@ -37,8 +37,9 @@ interface Made {
   /** Free SO2 needed and SO2 that goes in, as printed, mg/L. */
   readonly needed?: number | undefined;
   readonly dose?: number | undefined;
-  /** Amount for one vessel, and for all, in g, mL or tablets. */
-  each?: number;
+  /** Amount for one vessel, in g, mL or tablets … */
+  each?: number | undefined;
+  /** … and for all, in the same unit: g, mL or tablets. */
   whole?: number;
 }
 

@@ -99,7 +99,7 @@ function landingLines(work: EffectWork, added: Term | undefined, digits: number)
  * ```
  */
 export function effectSteps(work: EffectWork): readonly Step[] {
-  const make = (digits: number): { lines: Line[]; reached: number | undefined } => {
+  const make = (digits: number) => {
     const { lines, added } = addedLines(work, digits);
     const reached = added?.value ?? lines.at(-1)?.step.result.value;
     return { lines: [...lines, ...landingLines(work, added, digits)], reached };

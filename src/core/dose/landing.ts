@@ -21,8 +21,8 @@ export interface Landing {
  * nothing binds); expected: with half to a third of the dose bound; total: with the whole dose.
  *
  * @param before readings, mg/L
- * @param add_mg_L rise of free SO2, mg/L
- * @param dose_mg_L SO2 that goes in, mg/L
+ * @param add_mg_L rise of free SO2, mg/L, not negative
+ * @param dose_mg_L SO2 that goes in, mg/L, not negative
  * @param pK from `dissociation`
  *
  * @example

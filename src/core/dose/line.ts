@@ -9,8 +9,10 @@ export interface Line {
   readonly result: Term;
 }
 
-/** Fewest and most significant digits of a working. */
+/** Fewest significant digits of a working. */
 export const FEWEST_DIGITS = 4;
+
+/** Most significant digits of a working: all that a number has. */
 export const MOST_DIGITS = 15;
 
 /**
@@ -45,7 +47,7 @@ export function line(name: StepName, term: Term, unit: ShownUnit, digits: number
 }
 
 /**
- * A working with as few digits as still lead to the figure that is shown.
+ * A working with as few digits, from 4 to 15, as still lead to the figure that is shown.
  *
  * @param work makes the lines with so many significant digits
  * @param isRight whether the printed figures lead there
@@ -65,6 +67,9 @@ export function withEnoughDigits<T>(work: (digits: number) => T, isRight: (made:
 
 /**
  * Whether two figures print alike with four significant digits.
+ *
+ * @param a in any unit, finite
+ * @param b in the unit of `a`: mg/L, g, mL
  *
  * @example
  * ```ts

@@ -98,7 +98,7 @@ export function measured(portion: Portion): Measured | undefined {
 /**
  * The same for each of several equal vessels.
  *
- * @param portion of all vessels together
+ * @param portion of all vessels together: mg/L and L, not negative
  * @param count how many, 2 or more
  *
  * @example

@@ -18,12 +18,12 @@ export interface Portioned {
  * A dose as an amount of the request's additive in the request's volume. Nothing where volume or additive is unknown,
  * or where nothing goes in.
  *
- * @param dose_mg_L SO2 that goes in, mg/L
+ * @param dose_mg_L SO2 that goes in, mg/L, not negative
  * @param ceiling_mg_L most that may go in, mg/L
  *
  * @example
  * ```ts
- * portionOf({ volume_L: 225, additive: { id: 'potassium-metabisulfite' } }, 27)?.shown.measure // => { value: 11, unit: 'g' }
+ * portionOf({ volume_L: 225, additive: { id: 'potassium-metabisulfite' } }, 27)?.shown.measure // => { value: 10.5, unit: 'g' }
  * portionOf({ volume_L: 225 }, 27) // => undefined
  * ```
  */

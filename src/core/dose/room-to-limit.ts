@@ -39,7 +39,7 @@ export function roomToLimit(facts: LimitFacts & Before): RoomToLimit {
 /**
  * How the total stands to the limit once a dose is in; `within` where none is on file.
  *
- * @param dose_mg_L SO2 that goes in, mg/L
+ * @param dose_mg_L SO2 that goes in, mg/L, not negative
  *
  * @example
  * ```ts

@@ -17,14 +17,18 @@ export interface Rounded {
   readonly measure: Measure;
   /** What rounding changes in the wine, mg/L SO2 (above 0: more than the amount); 0 without a wine. */
   readonly rounding_mg_L: number;
-  /** The amount, the step of the instrument in the same unit (g, mL or tablets), and whether it was rounded down. */
+  /** The amount itself, in g, mL or tablets. */
   readonly exact: number;
+  /** Step of the instrument, in g, mL or tablets. */
   readonly step: number;
+  /** Whether it was rounded down in place of to the nearest. */
   readonly down: boolean;
 }
 
-/** Rounding is coarse above this share of the dose and above this many mg/L (own thresholds). */
+/** Rounding is coarse above this share of the dose (own threshold) … */
 export const COARSE_SHARE = 0.01;
+
+/** … and above this many mg/L of SO2 (own threshold). */
 export const COARSE_mg_L = 0.5;
 
 /** Finest steps: 0.01 g of a pocket balance, 0.1 mL of a syringe (common practice, no source). */
@@ -43,7 +47,7 @@ const isCoarse = (change: number, amount: number, dose_mg_L: number | undefined)
 /**
  * An amount to a whole number of steps.
  *
- * @param amount g, mL or tablets
+ * @param amount in g, mL or tablets, not negative
  * @param step in the same unit
  * @param down whether to round down in place of to the nearest
  *
@@ -64,7 +68,7 @@ export function toStep(amount: number, step: number, down = false): number {
  * (g or mL; kg and L from 1,000); if that changes the wine by more than 1 % of the dose and more than 0.5 mg/L,
  * a finer step down to 0.01 g or 0.1 mL. To the nearest, but never up past a ceiling. Tablets go down to the half.
  *
- * @param amount g, mL or number of tablets, 0 or more, full precision
+ * @param amount in g, mL or number of tablets, 0 or more, full precision
  * @param instrument what measures it
  * @param limits the dose in mg/L, and the most that may go in
  * @throws RangeError for NaN, infinities and negative values
@@ -119,7 +123,7 @@ function asShown(value: number, instrument: Instrument): Measure {
 /**
  * Whether what rounding changes is worth a warning: more than 1 % of the dose and more than 0.5 mg/L.
  *
- * @param rounding_mg_L what rounding changes, mg/L
+ * @param rounding_mg_L what rounding changes, mg/L, below or above 0
  * @param dose_mg_L the dose, mg/L
  *
  * @example

@@ -22,7 +22,7 @@ export function stageWarnings(stage: Stage): readonly Warning[] {
 }
 
 /**
- * What the pH and the additive call for.
+ * What the pH (usual from 2.8 to 4.2) and the additive call for.
  *
  * @example
  * ```ts

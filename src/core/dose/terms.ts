@@ -17,7 +17,7 @@ const HUNDRED_mL = shown(100, 'mL');
  *
  * @example
  * ```ts
- * number(0.576291, 4).text // => '0.57629'
+ * number(0.5762902160750947, 4).text // => '0.57629'
  * ```
  */
 export function number(value: number, digits: number): Term {
@@ -25,7 +25,7 @@ export function number(value: number, digits: number): Term {
 }
 
 /**
- * 10^(pH − pK) + 1 as a term.
+ * 10^(pH − pK) + 1 as a term, a pure number above 1.
  *
  * @example
  * ```ts
@@ -75,7 +75,7 @@ export function pKLine(
 /**
  * A volume as the person wrote it where that is the same volume, else in litres.
  *
- * @param volume_L L
+ * @param volume_L in L, above 0
  * @param display the same in another unit
  *
  * @example
@@ -90,7 +90,7 @@ export function volumeTerm(volume_L: number, display: VolumeShown | undefined, d
 }
 
 /**
- * A share that binds: as a fraction where it is one (`1 / 3`).
+ * A share that binds, 0 to 0.8: as a fraction where it is one (`1 / 3`).
  *
  * @example
  * ```ts
@@ -108,11 +108,29 @@ export function shareTerm(share: number, digits: number): Term {
   return number(share, digits);
 }
 
-/** 1 + p ÷ 100 as a term; `percent` in %. */
+/**
+ * 1 + p ÷ 100 as a term.
+ *
+ * @param percent share added, %, not negative
+ *
+ * @example
+ * ```ts
+ * allowanceTerm(30, 4).text // => '1 + 30 / 100'
+ * ```
+ */
 export const allowanceTerm = (percent: number, digits: number): Term =>
   plus(ONE, over(number(percent, digits), HUNDRED));
 
-/** 1 − s as a term; `share` from 0 to 0.8. */
+/**
+ * 1 − s as a term.
+ *
+ * @param share that binds, from 0 to 0.8
+ *
+ * @example
+ * ```ts
+ * remainderTerm(0.5, 4).text // => '1 - 0.5'
+ * ```
+ */
 export const remainderTerm = (share: number, digits: number): Term => minus(ONE, shareTerm(share, digits));
 
 /** How a line is named that turns SO2 into an amount of additive, by what is known of its strength; and its unit. */
@@ -128,7 +146,7 @@ export const AMOUNT_LINES: Readonly<Record<SO2Content['of'], readonly [StepName,
 };
 
 /**
- * SO2 in a gram, a millilitre or a tablet, as a term; `undefined` for pure SO2, which needs no line.
+ * SO2 in a gram, a millilitre or a tablet (above 0), as a term; `undefined` for pure SO2, which needs no line.
  *
  * @example
  * ```ts
@@ -140,11 +158,11 @@ export function contentTerm(content: SO2Content, digits: number): Term | undefin
     case 'salt':
       return number(content.share, digits);
     case 'assay':
-      return times(number(content.assay, digits), number(content.share, digits));
+      return times(number(content.assay_share, digits), number(content.share, digits));
     case 'yield':
       return number(content.fraction, digits);
     case 'gas':
-      return content.purity === 1 ? undefined : number(content.purity, digits);
+      return content.purity_share === 1 ? undefined : number(content.purity_share, digits);
     case 'salt-solution':
       return times(over(shown(content.salt_g_per_100_mL, 'g'), HUNDRED_mL), number(content.share, digits));
     case 'SO2-solution':

@@ -21,7 +21,7 @@ export interface VolumeShown {
 /**
  * A term of one number in a unit that a working may show.
  *
- * @param value in `unit`
+ * @param value in `unit`, finite
  * @param digits significant digits where the number has more than 9 (default 6)
  *
  * @example
