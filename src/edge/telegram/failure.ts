@@ -25,6 +25,10 @@ export function failureOf(error: unknown): Failure {
   return { kind: 'fault', reason: reasonOf(error) };
 }
 
+/** Whether the platform refused to be polled because a webhook is set. */
+export const isAboutWebhook = (failure: Failure): boolean =>
+  failure.kind === 'refused' && failure.code === 409 && /webhook/i.test(failure.reason);
+
 const reasonOf = (error: unknown): string => {
   if (!(error instanceof Error)) return String(error);
   const { code } = error as NodeJS.ErrnoException;

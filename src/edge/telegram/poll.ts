@@ -2,7 +2,7 @@ import type { Api } from 'grammy';
 
 import type { Clock } from '../clock.ts';
 import type { BackOff } from './back-off.ts';
-import { failureOf } from './failure.ts';
+import { failureOf, isAboutWebhook } from './failure.ts';
 import type { Intake } from './intake.ts';
 import { clientSignal } from './platform.ts';
 import { ALLOWED_UPDATES, readUpdates, type TelegramUpdate } from './update.ts';
@@ -40,7 +40,8 @@ export async function poll(options: PollOptions): Promise<number> {
       backOff.succeeded();
     } catch (error) {
       if (signal.aborted) break;
-      if (isWebhookInTheWay(error)) await api.deleteWebhook().catch(() => undefined);
+      // The operator asked for polling, so a webhook that stands in the way goes.
+      if (isAboutWebhook(failureOf(error))) await api.deleteWebhook().catch(() => undefined);
       await backOff.failed(error);
     }
   }
@@ -61,10 +62,4 @@ const askForUpdates = async (offset: number, options: PollOptions): Promise<unkn
   } finally {
     ended.abort();
   }
-};
-
-/** Polling is refused while a webhook is set: the operator asked for polling, so it goes. */
-const isWebhookInTheWay = (error: unknown): boolean => {
-  const failure = failureOf(error);
-  return failure.kind === 'refused' && failure.code === 409 && /webhook/i.test(failure.reason);
 };

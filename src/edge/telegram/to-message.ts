@@ -1,5 +1,6 @@
 import type { Content, IncomingMessage } from '../../chat/conversation/ports.ts';
 import { languageOf } from './language-of.ts';
+import { plainWords } from './plain-words.ts';
 import type { TelegramMessage, TelegramUpdate } from './update.ts';
 import { isServed, whoOf } from './who-of.ts';
 
@@ -38,7 +39,7 @@ const UNREADABLE: readonly (readonly [field: string, what: Unreadable])[] = [
 ];
 
 const contentOf = (message: TelegramMessage): Content | undefined => {
-  if (message.text !== undefined) return { kind: 'text', text: message.text };
+  if (message.text !== undefined) return { kind: 'text', text: plainWords(message.text) };
   const what = UNREADABLE.find(([field]) => message[field] !== undefined)?.[1];
   return what === undefined ? undefined : { kind: 'unreadable', what };
 };

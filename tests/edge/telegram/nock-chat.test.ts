@@ -89,6 +89,6 @@ test('a private chat goes its way through the real address', async () => {
   await ended;
   nock.abortPendingRequests();
   await bot.stop();
-  expect(sent.map(({ text }) => text)).toEqual(['1: /start', '2: first', '3: pressed again:2']);
+  expect(sent.map(({ text }) => text)).toEqual(['1: help', '2: first', '3: pressed again:2']);
   expect(faults).toEqual([]);
 });

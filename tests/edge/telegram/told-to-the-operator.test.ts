@@ -61,7 +61,7 @@ describe('the operator is told', () => {
     expect(bot.told.filter((sentence) => sentence.includes('Trying again'))).toHaveLength(6);
   });
 
-  test('nothing of a webhook that stands in the way of polling: it is taken away', async () => {
+  test('that a webhook stood in the way of polling and is taken away', async () => {
     await using scene = await openScene();
     const { api, rosa, serve } = scene;
     api.fail('getUpdates', {
@@ -69,9 +69,10 @@ describe('the operator is told', () => {
       description:
         "Conflict: can't use getUpdates method while webhook is active; use deleteWebhook to delete it",
     });
-    serve();
+    const bot = serve();
     rosa.sends('first');
     expect(await rosa.reads(1)).toBe('1: first');
     expect(api.callsOf('deleteWebhook')).toEqual([{}]);
+    expect(bot.told.join('\n')).toContain('A webhook was set for this bot');
   });
 });
