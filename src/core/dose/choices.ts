@@ -11,7 +11,7 @@ import { FREE_NEED_HIGH_mg_L } from './thresholds.ts';
  * The ways out where the need is high and nobody stated the target: leave it, go to 60 mg/L free, the full target.
  * One whose free or predicted total SO2 passes the limit on file carries no amount.
  *
- * @param request with pH and free SO2 (mg/L), inside `BOUNDS`
+ * @param request with pH and free SO2 (mg/L, not negative)
  * @param full the target in full, mg/L
  * @param pK from `dissociation`
  * @param room how far the limit is

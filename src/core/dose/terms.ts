@@ -5,7 +5,7 @@ import type { Dissociation } from '../chemistry/dissociation.ts';
 import type { StepName } from '../step-names.ts';
 import { LITRES_IN } from '../units/volume.ts';
 import { shown, type ShownUnit, type VolumeShown } from '../units/shown.ts';
-import { minus, over, plus, tenTo, termOf, times, type Term } from '../working.ts';
+import { minus, over, plus, roundTo, tenTo, termOf, times, type Term } from '../working.ts';
 import { line, type Line } from './line.ts';
 
 const ONE = termOf(1, '', 1, 4);
@@ -99,7 +99,8 @@ export function volumeTerm(volume_L: number, display: VolumeShown | undefined, d
  * ```
  */
 export function shareTerm(share: number, digits: number): Term {
-  for (const divisor of [3, 6, 7, 9]) {
+  const isShort = roundTo(share, 4) === share;
+  for (const divisor of isShort ? [] : [3, 6, 7, 9]) {
     const part = Math.round(share * divisor);
     if (part > 0 && Math.abs(share * divisor - part) < 1e-9) {
       return over(number(part, digits), number(divisor, digits));
