@@ -93,6 +93,42 @@ export interface ReadNote {
 /** The unit a person used, so that the reply can answer in it. */
 export type VolumeUnit = 'L' | 'hL' | 'mL' | 'm3' | 'galUS' | 'galUK' | 'barrel';
 
+/** Facts of a message that are no field but steer what it means and what is asked. */
+export interface Marks {
+  /** A powder or solution was named without its cation. */
+  unnamedAdditive?: true;
+  /** A small plain tablet, whose salt and size may be missing. */
+  campden?: true;
+  /** An effervescent tablet whose size was not said. */
+  tabletsOfUnknownSize?: true;
+  /** The word `salt` stood beside a bisulfite strength. */
+  strengthAsSalt?: true;
+  /** The amount stood in spoons. */
+  spoon?: true;
+  /** Barrels without a size: their litres, 225 each. */
+  barrelsAssumed_L?: number;
+  /** Those barrels were counted (`6 barrels`), not merely named. */
+  barrelsCounted?: true;
+  gallonRead?: true;
+  /** How many equal barrels or vessels the volume is the sum of. */
+  containers?: number;
+  volumeUnit?: VolumeUnit;
+  concentrationUnit?: 'ppm' | 'mg/L' | 'g/hL';
+  /** A weight of fruit stood in the place of a volume. */
+  fruitByWeight?: true;
+  /** The person wants to stop a fermentation. */
+  stopsFerment?: true;
+  /** A cask without a usual size was named. */
+  castsWithoutSize?: true;
+  solutionUse?: 'holding' | 'cleaning' | 'make-up';
+  /** The first line of the round said that all this was added. */
+  pastLine?: true;
+  /** `each` stood beside the volume of several vessels. */
+  statedEach?: true;
+  /** One volume beside several vessels: of each or in all? */
+  eachOrTotal?: true;
+}
+
 /** Where a field stood in the text (UTF-16 offsets of the message as it came). */
 export interface Place {
   readonly start: number;
@@ -118,6 +154,8 @@ export interface Reading {
   /** How many equal barrels or vessels `volume_L` is the sum of (`6 barrels`, `40 x 225 L`). */
   readonly containers?: number;
   readonly concentrationUnit?: 'ppm' | 'mg/L' | 'g/hL';
+  /** What else was read that steers what is asked. */
+  readonly marks: Readonly<Marks>;
   readonly where: Readonly<Partial<Record<FieldName, Place>>>;
 }
 
@@ -140,3 +178,6 @@ export interface ReaderSettings {
   /** Usual molecular targets in mg/L. */
   readonly targets: { readonly red: number; readonly white: number; readonly sweet: number };
 }
+
+/** A reading before its assumptions and questions are worked out. */
+export type Draft = Omit<Reading, 'assumed' | 'asks'>;

@@ -1,0 +1,92 @@
+import type { Language } from './understood.ts';
+import type { DangerId, Words } from './words/words.ts';
+import { de } from './words/de.ts';
+import { en } from './words/en.ts';
+import { es } from './words/es.ts';
+import { fr } from './words/fr.ts';
+import { it } from './words/it.ts';
+import { pt } from './words/pt.ts';
+
+/** Where a group of words stands: the indices of its first and last word. */
+interface Hit {
+  readonly from: number;
+  readonly to: number;
+}
+
+type Hits = ReadonlyMap<DangerId, readonly Hit[]>;
+
+/** Words of one language by their first word, so that a message is looked through once. */
+type Index = ReadonlyMap<string, readonly { readonly words: readonly string[]; readonly id: DangerId }[]>;
+
+function indexOf({ danger }: Words): Index {
+  const index = new Map<string, { words: readonly string[]; id: DangerId }[]>();
+  for (const [id, phrases] of Object.entries(danger) as [DangerId, readonly string[]][]) {
+    for (const phrase of phrases) {
+      const words = phrase.split(' ');
+      index.set(words[0]!, [...(index.get(words[0]!) ?? []), { words, id }]);
+    }
+  }
+  return index;
+}
+
+const INDICES: readonly (readonly [Language, Index])[] = [en, es, fr, it, de, pt].map((words) => [words.language, indexOf(words)]);
+
+function hitsIn(words: readonly string[], index: Index): Hits {
+  const hits = new Map<DangerId, Hit[]>();
+  for (let i = 0; i < words.length; i++) {
+    for (const { words: phrase, id } of index.get(words[i]!) ?? []) {
+      if (phrase.every((word, k) => words[i + k] === word)) hits.set(id, [...(hits.get(id) ?? []), { from: i, to: i + phrase.length - 1 }]);
+    }
+  }
+  return hits;
+}
+
+const all = (hits: Hits, id: DangerId): readonly Hit[] => hits.get(id) ?? [];
+const has = (hits: Hits, id: DangerId): boolean => hits.has(id);
+
+/** Whether what fell or cannot breathe is a thing named up to three words before: `foam collapsed`. */
+function isThing(hits: Hits, words: readonly string[], { from }: Hit): boolean {
+  const before = (id: DangerId): boolean => all(hits, id).some((hit) => hit.to < from && from - hit.to <= 3);
+  const vessel = words.slice(Math.max(0, from - 3), from).some((word) => /^(t|fv|b)?\d+$/.test(word));
+  return (before('thing') || vessel) && !before('person');
+}
+
+/** A gas and a leak within four words; free and total SO2 are no gas. */
+function isGasLeak(hits: Hits, words: readonly string[]): boolean {
+  const gases = all(hits, 'gas').filter(({ from }) => !['free', 'total', 'libre', 'livre', 'libera', 'mol', 'molecular'].includes(words[from - 1] ?? ''));
+  return gases.some((gas) => all(hits, 'leak').some((leak) => Math.abs(leak.from - gas.from) <= 5));
+}
+
+function isDanger(hits: Hits, words: readonly string[]): boolean {
+  const person = (['down', 'breathless'] as const).some((id) => all(hits, id).some((hit) => !isThing(hits, words, hit)));
+  if (person) return true;
+  if (all(hits, 'hurt-eye').some(({ to }) => !(words[to] === 'eyes' && words[to + 1] === 'of'))) return true;
+  if (all(hits, 'swallowed').some((hit) => !isThing(hits, words, hit))) return true;
+  if ((has(hits, 'drank') || has(hits, 'burnt')) && has(hits, 'chemical')) return true;
+  if (isGasLeak(hits, words)) return true;
+  if (has(hits, 'alarm') && !has(hits, 'elsewhere')) return true;
+  const vessel = has(hits, 'vessel') || words.some((word) => /^(t|fv)\d{1,3}$/.test(word));
+  const inside = all(hits, 'went-in').some((hit) => !isThing(hits, words, hit));
+  if (!has(hits, 'silent')) return false;
+  return (inside && (has(hits, 'person') || !has(hits, 'elsewhere'))) || (has(hits, 'person') && vessel && !has(hits, 'elsewhere'));
+}
+
+/**
+ * Recognises somebody in danger, in all six languages whatever the chat's.
+ *
+ * @param text A folded message.
+ * @param chat The chat's language, which is looked at first.
+ * @returns The language in which it was recognised, or undefined.
+ * @example
+ * ```ts
+ * recogniseEmergency('the new guy collapsed', 'en') // => 'en'
+ * recogniseEmergency('eyes on t4 please', 'en') // => undefined
+ * recogniseEmergency('ne respire plus', 'en') // => 'fr'
+ * ```
+ */
+export function recogniseEmergency(text: string, chat: Language): Language | undefined {
+  const words = text.match(/[\p{L}\d]+(?:'\p{L}+)*/gu);
+  if (!words) return undefined;
+  const ordered = INDICES.toSorted(([a], [b]) => Number(b === chat) - Number(a === chat));
+  return ordered.find(([, index]) => isDanger(hitsIn(words, index), words))?.[0];
+}

@@ -1,0 +1,101 @@
+import { LITRES_IN } from '../../../core/units/volume.ts';
+import type { Board } from '../board.ts';
+import { claim, figureAt, find, hasTag, isCue, isFound, isFree, isMark, refuse } from '../board.ts';
+import type { UnitId } from '../words/words.ts';
+import { unitAt } from '../units.ts';
+
+/** Litres in a barrel whose size nobody said; common practice, no source. */
+export const USUAL_BARREL_L = 225;
+
+const SIZE_UNITS: readonly UnitId[] = ['L', 'gal', 'galUS', 'galUK', 'hL'];
+
+const isBarrel = (board: Board, i: number): boolean => hasTag(board, i, 'vessel:barrel');
+const isTimes = (board: Board, i: number): boolean => isMark(board, i, '×') || board.terms[i]?.text === 'x' || isMark(board, i, '*');
+
+/** Litres in one of a unit, gallons as the chat has them. */
+export function litresOf(board: Board, unit: UnitId): number {
+  if (unit === 'gal') return LITRES_IN[board.settings.gallon === 'US' ? 'galUS' : 'galUK'];
+  if (unit === 'floz') return board.settings.gallon === 'US' ? 0.0295735295625 : 0.0284130625;
+  return LITRES_IN[unit as 'L'];
+}
+
+/** Notes which unit a volume was said in, and that a gallon without its country was read. */
+export function noteUnit(board: Board, unit: UnitId): void {
+  if (unit === 'gal') board.marks.gallonRead = true;
+  const galUS = board.settings.gallon === 'US' ? 'galUS' : 'galUK';
+  const shown = unit === 'gal' ? galUS : unit === 'cL' || unit === 'floz' ? 'mL' : unit;
+  board.marks.volumeUnit ??= shown as 'L';
+}
+
+/** A size in litres or gallons at term `i`; without a unit only where `bare` allows (`40 x 228`). */
+function sizeAt(board: Board, i: number, bare: boolean): { litres: number; to: number } | undefined {
+  if (!isFree(board, i)) return undefined;
+  const { value } = figureAt(board, i);
+  const unit = unitAt(board, i + 1, SIZE_UNITS);
+  if (unit) {
+    noteUnit(board, unit.id);
+    return { litres: value * litresOf(board, unit.id), to: unit.to };
+  }
+  return bare && value >= 100 && value <= 700 ? { litres: value, to: i } : undefined;
+}
+
+/** `40 x 225 L`, `6 x 60 gal barrels`, `6 barrels of 228`, `6 barrels (228 L)`, `6 225 L barrels`. */
+function findCounted(board: Board, i: number): boolean {
+  const { value: count, from } = figureAt(board, i);
+  if (count < 0 || !Number.isFinite(count)) return false;
+  const named = isBarrel(board, i + 1) || hasTag(board, i + 1, 'vessel:cask') || hasTag(board, i + 1, 'vessel:other');
+  const times = isTimes(board, i + 1);
+  if (times) {
+    const size = sizeAt(board, i + 2, true);
+    if (!size) return false;
+    const hasWord = isBarrel(board, size.to + 1) || hasTag(board, size.to + 1, 'vessel:cask');
+    return keep(board, count, size.litres, from, hasWord ? size.to + 1 : size.to);
+  }
+  if (!named) {
+    const size = sizeAt(board, i + 1, false);
+    const isSize = size !== undefined && isBarrel(board, size.to + 1) && count < 1000 && /^\d+$/.test(board.terms[i]!.text);
+    return isSize && keep(board, count, size.litres, from, size.to + 1);
+  }
+  let at = i + 2;
+  while (isCue(board, at, 'of') || isCue(board, at, 'with') || isMark(board, at, '(') || isMark(board, at, '@') || isTimes(board, at) || isCue(board, at, 'is')) at++;
+  const size = at <= i + 4 ? sizeAt(board, at, at > i + 2) : undefined;
+  if (size && (at > i + 2 || size.litres <= 700)) {
+    const each = isCue(board, size.to + 1, 'each') ? size.to + 1 : size.to;
+    return keep(board, count, size.litres, from, each);
+  }
+  if (!isBarrel(board, i + 1)) {
+    board.marks.castsWithoutSize = true;
+    claim(board, from, i + 1);
+    return true;
+  }
+  if (count === 0) {
+    refuse(board, 'volume-not-positive', from, i + 1);
+    return true;
+  }
+  board.marks.barrelsAssumed_L = count * USUAL_BARREL_L;
+  board.marks.barrelsCounted = true;
+  board.marks.containers = count;
+  board.marks.volumeUnit ??= 'barrel';
+  claim(board, from, i + 1);
+  return true;
+}
+
+function keep(board: Board, count: number, litres: number, from: number, to: number): boolean {
+  if (Number.isInteger(count)) board.marks.containers = count;
+  find(board, 'volume_L', count * litres, 'unit', from, to);
+  return true;
+}
+
+/** Finds barrels by number and size. Without a size they are 225 L, said as an assumption. */
+export function findBarrels(board: Board): void {
+  for (let i = 0; i < board.terms.length; i++) {
+    if (isFree(board, i)) findCounted(board, i);
+    else if (board.taken[i] !== true && board.terms[i]!.kind === 'word') {
+      if (isBarrel(board, i) && !isFound(board, 'vessel') && !isFound(board, 'vessels')) {
+        const size = sizeAt(board, i + 1, false);
+        if (!size && board.marks.barrelsAssumed_L === undefined && !/s$/.test(board.terms[i]!.text)) board.marks.barrelsAssumed_L = USUAL_BARREL_L;
+      }
+      if (hasTag(board, i, 'vessel:cask')) board.marks.castsWithoutSize = true;
+    }
+  }
+}

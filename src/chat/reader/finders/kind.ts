@@ -1,0 +1,28 @@
+import type { Category, Product, Style } from '../../../core/wine.ts';
+import type { Board } from '../board.ts';
+import { find, hasTag, isCue } from '../board.ts';
+
+const STYLES: readonly Style[] = ['red', 'white', 'rosé'];
+const CATEGORIES: readonly Category[] = ['sweet', 'sparkling', 'fortified'];
+const PRODUCTS: readonly Product[] = ['cider', 'mead', 'fruit-wine'];
+
+/** `rose to 3.6` is a verb, `sample port` a tap. */
+function isOtherwise(board: Board, i: number): boolean {
+  const { text } = board.terms[i]!;
+  if (text === 'rose') return isCue(board, i + 1, 'to') || isCue(board, i + 1, 'by') || isCue(board, i + 1, 'from');
+  return text === 'port' && (isCue(board, i - 1, 'lot') || isCue(board, i - 1, 'vessel-statement') || isCue(board, i - 1, 'article'));
+}
+
+/** Finds colour, category and product, and the word organic. */
+export function findKind(board: Board): void {
+  for (let i = 0; i < board.terms.length; i++) {
+    if (board.taken[i] === true || board.terms[i]!.kind !== 'word' || isOtherwise(board, i)) continue;
+    const style = STYLES.find((one) => hasTag(board, i, `style:${one}`));
+    const category = CATEGORIES.find((one) => hasTag(board, i, `category:${one}`));
+    const product = PRODUCTS.find((one) => hasTag(board, i, `product:${one}`));
+    if (style) find(board, 'style', style, 'labelled', i, i);
+    else if (category) find(board, 'category', category, 'labelled', i, i);
+    else if (product) find(board, 'product', product, 'labelled', i, i);
+    else if (hasTag(board, i, 'organic')) find(board, 'organic', true, 'labelled', i, i);
+  }
+}

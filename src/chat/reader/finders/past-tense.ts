@@ -1,0 +1,24 @@
+import type { Board } from '../board.ts';
+import { isCue, isMark } from '../board.ts';
+
+/** Whether a cue stands somewhere between two terms. */
+function cueBetween(board: Board, from: number, to: number, cue: 'not' | 'if' | 'not-yet'): boolean {
+  for (let k = Math.max(0, from); k < to; k++) if (isCue(board, k, cue)) return true;
+  return false;
+}
+
+function isFact(board: Board, i: number): boolean {
+  const first = board.terms.findIndex(({ kind }) => kind === 'word');
+  const asks = first >= 0 && first < i && isCue(board, first, 'question');
+  return !asks && !isMark(board, i + 1, '?') && !cueBetween(board, i - 5, i, 'not') && !cueBetween(board, 0, i, 'if') && !cueBetween(board, 0, i, 'not-yet');
+}
+
+/** Finds that something was added: a past-tense verb that is neither negated, conditional, asked nor still to come. */
+export function findPastTense(board: Board): void {
+  if (board.marks.pastLine) board.pastTense = true;
+  const said = board.terms.findIndex((_, i) => board.taken[i] !== true && isCue(board, i, 'past'));
+  if (said < 0) return;
+  board.pastTense = isFact(board, said);
+  const negated = cueBetween(board, said - 5, said, 'not');
+  if (negated) board.notes.push({ id: 'negated', text: '' });
+}

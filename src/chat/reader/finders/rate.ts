@@ -1,0 +1,58 @@
+import type { Board } from '../board.ts';
+import { claim, figureAt, find, hasTag, isCue, isFree, isMark, refuse } from '../board.ts';
+import type { UnitId } from '../words/words.ts';
+import { VOLUME_UNITS, concentrationAt, unitAt } from '../units.ts';
+import { USUAL_BARREL_L, litresOf } from './barrels.ts';
+import { gramsOf } from './mass.ts';
+
+const MASSES: readonly UnitId[] = ['g', 'kg', 'lb', 'oz', 'mg'];
+
+const isPer = (board: Board, i: number): boolean => isMark(board, i, '/') || isCue(board, i, 'per');
+
+/** Where "per" stands after a mass, past the additive's name (`1 g kmbs per 10 L`). */
+function perAfter(board: Board, i: number): number | undefined {
+  let k = i;
+  while (k < i + 3 && (isCue(board, k, 'of') || board.terms[k]?.tags.some((tag) => tag.startsWith('additive')) === true)) k++;
+  return isPer(board, k) ? k : undefined;
+}
+
+/** What the rate is per: litres, or fruit by weight. */
+function baseAt(board: Board, i: number): { litres?: number; fruit?: true; unsure?: true; to: number } | undefined {
+  const figure = isFree(board, i) ? figureAt(board, i) : undefined;
+  const at = figure ? i + 1 : i;
+  if (hasTag(board, at, 'vessel:barrel')) return { litres: (figure?.value ?? 1) * USUAL_BARREL_L, to: at };
+  const term = board.terms[at];
+  if (figure && term?.text === 'g' && term.capital && [60, 1000].includes(figure.value)) return { unsure: true, to: at };
+  const mass = unitAt(board, at, ['kg', 'ton', 'quintal', 'lb']);
+  if (mass) return { fruit: true, to: mass.to };
+  const volume = unitAt(board, at, VOLUME_UNITS);
+  if (!volume || (figure && (figure.unsure || !(figure.value > 0)))) return undefined;
+  return { litres: (figure?.value ?? 1) * litresOf(board, volume.id), to: volume.to };
+}
+
+function findRateAt(board: Board, i: number): void {
+  const unit = unitAt(board, i + 1, MASSES);
+  if (!unit || concentrationAt(board, i + 1)) return;
+  const per = perAfter(board, unit.to + 1);
+  const base = per === undefined ? undefined : baseAt(board, per + 1);
+  if (per === undefined || base === undefined) return;
+  const { value, unsure } = figureAt(board, i);
+  if (unsure || base.unsure) return refuse(board, 'ambiguous-number', i, base.to);
+  const between = (from: number, to: number): void => {
+    for (let k = from; k <= to; k++) if (!board.terms[k]!.tags.some((tag) => tag.startsWith('additive'))) claim(board, k, k);
+  };
+  if (base.fruit) {
+    board.marks.fruitByWeight = true;
+    return between(i, base.to);
+  }
+  const rate = (value * gramsOf(unit.id) * 1000) / base.litres!;
+  const single = per + 1 === base.to && unit.id === 'g' && unitAt(board, per + 1, ['L', 'hL']) !== undefined;
+  if (single) return refuse(board, 'ambiguous-number', i, base.to);
+  find(board, 'rate_mg_L', rate, 'unit', i, unit.to);
+  between(unit.to + 1, base.to);
+}
+
+/** Finds a rate of additive: `1 g per 10 L`, `1 lb/1000 gal`. `g/hL`, `mg/L` and `ppm` are none. */
+export function findRate(board: Board): void {
+  for (let i = 0; i < board.terms.length; i++) if (isFree(board, i)) findRateAt(board, i);
+}

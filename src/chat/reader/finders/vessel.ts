@@ -1,0 +1,126 @@
+import type { Board } from '../board.ts';
+import { claim, find, hasTag, isCue, isFree, isMark, refuse } from '../board.ts';
+import { MASS_UNITS, VOLUME_UNITS, concentrationAt, unitAt } from '../units.ts';
+
+/** One vessel as it stands in the text. */
+interface Named {
+  readonly name: string;
+  readonly kind: string;
+  readonly number?: number;
+  readonly from: number;
+  readonly to: number;
+}
+
+const isWholeAt = (board: Board, i: number): boolean =>
+  isFree(board, i) && board.terms[i]!.value === undefined && /^\d{1,4}$/.test(board.terms[i]!.text);
+
+/** Whether the number at `i` is a figure with a unit of its own, so that no vessel word may claim it. */
+function hasOwnUnit(board: Board, i: number): boolean {
+  return (
+    unitAt(board, i + 1, VOLUME_UNITS) !== undefined ||
+    unitAt(board, i + 1, MASS_UNITS) !== undefined ||
+    concentrationAt(board, i + 1) !== undefined ||
+    isMark(board, i + 1, '%') ||
+    (isCue(board, i + 1, 'thousand') && board.terms[i + 1]!.gap === false) ||
+    (isMark(board, i + 1, '/') && !board.terms[i + 1]!.gap)
+  );
+}
+
+/** `4A` after a tank word: the letter belongs to the name. */
+function suffix(board: Board, i: number): { letter: string; to: number } {
+  const after = board.terms[i + 1];
+  const letter = after?.kind === 'word' && !after.gap && /^[a-z]$/.test(after.text) && !hasOwnUnit(board, i);
+  return letter ? { letter: after.text.toUpperCase(), to: i + 1 } : { letter: '', to: i };
+}
+
+const kindOf = (board: Board, i: number): string | undefined => {
+  if (hasTag(board, i, 'vessel:tank')) return 'tank';
+  if (hasTag(board, i, 'vessel:barrel') || hasTag(board, i, 'vessel:cask')) return 'barrel';
+  return hasTag(board, i, 'vessel:other') ? board.terms[i]!.text.toUpperCase() : undefined;
+};
+
+/** `tank 4`, `tank #4`, `tank no. 4`, `barrel 17`, `tank B`. */
+function worded(board: Board, i: number): Named | undefined {
+  const kind = kindOf(board, i);
+  if (kind === undefined || (board.terms[i]!.text === 'stuck' && board.terms[i - 1]?.kind !== 'number')) return undefined;
+  let k = i + 1;
+  while (isMark(board, k, '#') || isMark(board, k, '-') || isMark(board, k, ':') || isMark(board, k, '.') || isMark(board, k, "'") || isCue(board, k, 'number-sign')) k++;
+  if (k > i + 3) return undefined;
+  if (isWholeAt(board, k) && !hasOwnUnit(board, k)) {
+    if (isMark(board, k + 1, 'x') || board.terms[k + 1]?.text === 'x' || isMark(board, k + 1, '×')) return undefined;
+    const { letter, to } = suffix(board, k);
+    const number = Number(board.terms[k]!.text);
+    return { name: `${kind} ${number}${letter}`, kind, ...(letter ? {} : { number }), from: i, to };
+  }
+  const single = board.terms[i + 1];
+  if (kind === 'tank' && single?.kind === 'word' && /^[b-z]$/.test(single.text) && single.capital && board.terms[i + 2]?.kind !== 'number') {
+    return { name: `tank ${single.text.toUpperCase()}`, kind, from: i, to: i + 1 };
+  }
+  return undefined;
+}
+
+const NO_CODE = /^(label:(?!so2)|cue:(target|to|from|raise|up|add|need|in|of|with|by|and|per|is|molecular|lot|binding|number-sign|month|not|correction|size|past|over|at)|unit:(none|ppm)|additive|stage|style|organic|category)/;
+
+/** `T4`, `T-4`, `FV3`, `B17`: letters and a whole number with nothing between but a hyphen. */
+function coded(board: Board, i: number): Named | undefined {
+  const word = board.terms[i]!;
+  if (!/^[a-z]{1,4}$/.test(word.text) || (board.terms[i - 1]?.kind === 'number' && !word.gap)) return undefined;
+  const hyphen = isMark(board, i + 1, '-') && board.terms[i + 1]!.gap === false;
+  const k = hyphen ? i + 2 : i + 1;
+  if (!isWholeAt(board, k)) return undefined;
+  const glued = board.terms[k]!.gap === false;
+  const spacedT = word.text === 't' && !hyphen;
+  if (!glued && !spacedT) return undefined;
+  const tank = word.text === 't' || hasTag(board, i, 'vessel:tank');
+  const barrel = hasTag(board, i, 'vessel:barrel');
+  const single = word.text.length === 1;
+  if (!tank && !barrel && word.tags.some((tag) => (single ? /^(cue:(in|of|with)|label)/ : NO_CODE).test(tag)) && word.text !== 'b') return undefined;
+  if (word.text === 'x' || (hasOwnUnit(board, k) && !glued)) return undefined;
+  if (glued && !hyphen && single && hasOwnUnit(board, k) && isMark(board, k + 1, '/')) return undefined;
+  const { letter, to } = suffix(board, k);
+  const number = Number(board.terms[k]!.text);
+  const prefix = tank && !letter ? 'tank ' : barrel ? 'barrel ' : `${word.text.toUpperCase()}`;
+  const name = tank && letter ? `T${number}${letter}` : `${prefix}${number}${letter}`;
+  return { name, kind: prefix, ...(letter ? {} : { number }), from: i, to };
+}
+
+/** `B1-B24`, `barrels 12 to 24`: the last vessel of the range, when one follows. */
+function rangeEnd(board: Board, first: Named): { number: number; to: number } | undefined {
+  const k = first.to + 1;
+  const joins = isMark(board, k, '-') || isCue(board, k, 'to') || isCue(board, k, 'joined') || (isMark(board, k, '.') && isMark(board, k + 1, '.'));
+  if (!joins || first.number === undefined) return undefined;
+  const at = isMark(board, k, '.') ? k + 2 : k + 1;
+  const second = worded(board, at) ?? (board.terms[at]?.kind === 'word' ? coded(board, at) : undefined);
+  if (second?.number !== undefined && second.kind === first.kind) return { number: second.number, to: second.to };
+  const plural = /s$/.test(board.terms[first.from]!.text) || isMark(board, k, '-');
+  if (plural && isWholeAt(board, at) && !hasOwnUnit(board, at) && (kindOf(board, first.from) !== undefined || board.terms[at]!.gap === false)) {
+    return { number: Number(board.terms[at]!.text), to: at };
+  }
+  return undefined;
+}
+
+function findRange(board: Board, first: Named, last: { number: number; to: number }): void {
+  const from = first.number!;
+  if (last.number <= from || last.number - from > 499) {
+    refuse(board, 'ambiguous-number', first.from, last.to);
+    return;
+  }
+  const prefix = /^(tank|barrel|[A-Z]+ )/.test(first.name) ? `${first.name.slice(0, first.name.lastIndexOf(String(from)))}` : first.kind;
+  find(board, 'vessels', Array.from({ length: last.number - from + 1 }, (_, k) => `${prefix}${from + k}`), 'labelled', first.from, last.to);
+}
+
+/** Finds the vessel: a tank or barrel word with its number, or a code; `B1-B24` is that many vessels. */
+export function findVessel(board: Board): void {
+  for (let i = 0; i < board.terms.length; i++) {
+    if (board.taken[i] === true || board.terms[i]!.kind !== 'word') continue;
+    const named = worded(board, i) ?? coded(board, i);
+    if (!named) continue;
+    const last = rangeEnd(board, named);
+    if (last) findRange(board, named, last);
+    else {
+      find(board, 'vessel', named.name, 'labelled', named.from, named.to);
+      if (kindOf(board, i - 1) === 'tank' || kindOf(board, i - 1) === 'barrel') claim(board, i - 1, i - 1);
+    }
+    i = (last ?? named).to;
+  }
+}

@@ -1,0 +1,82 @@
+import type { Board, Figure } from '../board.ts';
+import { figureAt, find, findingOf, isCue, isFree, isMark, refuse } from '../board.ts';
+import { litresOf, noteUnit } from './barrels.ts';
+import type { UnitAt } from '../units.ts';
+import { VOLUME_UNITS, unitAt } from '../units.ts';
+
+/** A volume as it stands: `2.5k L`, `12 hl`, `3 m3`. */
+interface VolumeAt {
+  readonly litres: number;
+  readonly figure: Figure;
+  readonly unit: UnitAt;
+}
+
+function volumeAt(board: Board, i: number): VolumeAt | undefined {
+  if (!isFree(board, i)) return undefined;
+  const thousand = isCue(board, i + 1, 'thousand') && (board.terms[i + 1]!.gap === false || board.terms[i + 1]!.text !== 'k');
+  const unit = unitAt(board, thousand ? i + 2 : i + 1, VOLUME_UNITS);
+  if (!unit) return undefined;
+  const figure = figureAt(board, i);
+  return { litres: figure.value * (thousand ? 1000 : 1) * litresOf(board, unit.id), figure, unit };
+}
+
+/** `6+6+4 gal`: the terms of a sum that one unit closes. */
+function sumStart(board: Board, i: number): number {
+  let from = i;
+  while (isMark(board, from - 1, '+') && isFree(board, from - 2) && !(board.terms[from - 1]!.gap && !board.terms[from]!.gap)) from -= 2;
+  return from;
+}
+
+function sumOf(board: Board, from: number, to: number): number {
+  let total = 0;
+  for (let k = from; k <= to; k += 2) total += figureAt(board, k).value;
+  return total;
+}
+
+/** `83 gal (28+15+40)`: the sum in brackets is the same volume once more. */
+function bracketEnd(board: Board, i: number): number | undefined {
+  if (!isMark(board, i, '(') || !isFree(board, i + 1) || !isMark(board, i + 2, '+')) return undefined;
+  let k = i + 1;
+  while (isFree(board, k) && isMark(board, k + 1, '+')) k += 2;
+  return isFree(board, k) && isMark(board, k + 1, ')') ? k + 1 : undefined;
+}
+
+const isRange = (board: Board, i: number): boolean =>
+  (isMark(board, i - 1, '-') || isCue(board, i - 1, 'to') || (isCue(board, i - 1, 'joined'))) &&
+  isFree(board, i - 2) &&
+  !(isMark(board, i - 1, '-') && board.terms[i - 1]!.gap);
+
+/** A volume of mL or a few litres that belongs to an additive, not to the wine. */
+function findVolumeAt(board: Board, i: number): number {
+  const volume = volumeAt(board, i);
+  if (!volume) return i;
+  if (volume.figure.unsure || Number.isNaN(volume.figure.value)) {
+    refuse(board, 'ambiguous-number', i, volume.unit.to);
+    return volume.unit.to;
+  }
+  if (isRange(board, i)) {
+    refuse(board, 'ambiguous-number', i - 2, volume.unit.to);
+    return volume.unit.to;
+  }
+  const start = sumStart(board, i);
+  const litres = start < i ? sumOf(board, start, i) * litresOf(board, volume.unit.id) : volume.litres;
+  const bracket = bracketEnd(board, volume.unit.to + 1);
+  noteUnit(board, volume.unit.id);
+  if (litres <= 0) {
+    refuse(board, 'volume-not-positive', volume.figure.from, volume.unit.to);
+    return volume.unit.to;
+  }
+  const to = bracket ?? volume.unit.to;
+  const before = findingOf(board, 'volume_L');
+  find(board, 'volume_L', litres, 'unit', start < i ? start : volume.figure.from, to);
+  if (start < i) board.notes.push({ id: 'volume-sum', text: board.message.slice(board.folded.at[board.terms[start]!.start], board.folded.at[board.terms[to]!.end]) });
+  if (isCue(board, to + 1, 'each')) board.marks.statedEach = true;
+  const isSame = before !== undefined && Math.abs(before.value - litres) <= 0.01 * before.value;
+  if (isSame) board.findings.splice(board.findings.length - 1, 1);
+  return to;
+}
+
+/** Finds the volume of wine. The same volume in two units, within 1 %, is one: the first figure counts. */
+export function findVolume(board: Board): void {
+  for (let i = 0; i < board.terms.length; i++) i = findVolumeAt(board, i);
+}

@@ -1,0 +1,103 @@
+import type { Term } from './split-terms.ts';
+
+const DENOMINATORS = new Set([2, 3, 4, 8, 16]);
+const isWhole = (term: Term | undefined): boolean => term?.kind === 'number' && term.value === undefined && /^\d+$/.test(term.text);
+const has = (term: Term | undefined, pattern: RegExp): boolean => term?.tags.some((tag) => pattern.test(tag)) === true;
+
+const FRACTION_OF = /^(unit:(?!none|ppm|mg\/L|C$|F$|degree)|cue:tablet|additive:campden)/;
+
+/** Whether a unit of mass or volume, a spoon or a tablet follows, so that `1/2` is half of one. */
+function isOfSomething(terms: readonly Term[], i: number): boolean {
+  for (let k = i; k < i + 3; k++) {
+    if (has(terms[k], FRACTION_OF)) return true;
+    if (!has(terms[k], /^cue:(of|article)$/) && terms[k]?.text !== '-') return false;
+  }
+  return false;
+}
+
+function joined(first: Term, last: Term, value: number, text: string): Term {
+  return { ...first, text, end: last.end, value };
+}
+
+/** `1/2 lb`, `1 1/2 oz`, `1½ lb`: one number where a unit follows. */
+function joinFractions(terms: readonly Term[]): Term[] {
+  const out: Term[] = [];
+  for (let i = 0; i < terms.length; i++) {
+    const [a, slash, b] = [terms[i]!, terms[i + 1], terms[i + 2]];
+    const vulgar = a.kind === 'number' && a.value !== undefined && a.value < 1;
+    const [n, d] = [Number(a.text), Number(b?.text)];
+    const plain =
+      isWhole(a) && slash?.text === '/' && !slash.gap && isWhole(b) && b?.gap === false && DENOMINATORS.has(d) && n > 0 && n < d;
+    if (!(vulgar || (plain && terms[i + 3]?.text !== '/' && isOfSomething(terms, i + 3)))) {
+      out.push(a);
+      continue;
+    }
+    const last = plain ? b! : a;
+    const share = plain ? n / d : a.value!;
+    const whole = out.at(-1);
+    if (whole && isWhole(whole) && (vulgar || a.gap) && Number(whole.text) < 1000 && out.at(-2)?.text !== '/') {
+      out[out.length - 1] = joined(whole, last, Number(whole.text) + share, `${whole.text} ${a.text}`);
+    } else out.push(joined(a, last, share, a.text));
+    if (plain) i += 2;
+  }
+  return out;
+}
+
+const CLAIMS_NEXT = /^(label:(?!volume)|vessel:|cue:(target|to|add|raise|lot|molecular|from)$|stage:|unit:none)/;
+
+/** Whether the number after term `i` is claimed by a label or vessel word before it. */
+function isClaimedBefore(terms: readonly Term[], i: number): boolean {
+  let k = i;
+  while (k >= 0 && (terms[k]!.text === ':' || terms[k]!.text === '=' || terms[k]!.text === '#' || (has(terms[k], /^cue:is$/) && !has(terms[k], CLAIMS_NEXT)))) k--;
+  return k >= 0 && has(terms[k], CLAIMS_NEXT);
+}
+
+const unitFollows = (terms: readonly Term[], i: number): boolean =>
+  has(terms[i], /^unit:(L|hL|m3|gal|galUS|galUK|mL|g|kg|lb)$/) || has(terms[i], /^cue:thousand$/);
+
+/** Whether some other bare whole number could be the free SO2, so that `21 800 gal` needs no such reading. */
+function hasOtherFree(terms: readonly Term[], from: number, to: number): boolean {
+  if (terms.some((term) => has(term, /^label:(free|so2)$|^unit:ppm$|^cue:(target|add)$/))) return true;
+  return terms.some(
+    (term, k) =>
+      (k < from || k > to) && isWhole(term) && term.gap && !unitFollows(terms, k + 1) && !isClaimedBefore(terms, k - 1) && terms[k + 1]?.text !== '%',
+  );
+}
+
+/** `1 200 L`: a blank groups thousands, unless a label or vessel claims its first part. */
+function joinBlankGroups(terms: readonly Term[]): Term[] {
+  const out: Term[] = [];
+  for (let i = 0; i < terms.length; i++) {
+    const first = terms[i]!;
+    let last = i;
+    if (isWhole(first) && first.text.length <= 3 && !first.text.startsWith('0')) {
+      while (terms[last + 1]?.kind === 'number' && terms[last + 1]!.gap && /^\d{3}([.,]\d{1,2})?$/.test(terms[last + 1]!.text)) last++;
+    }
+    if (last === i || !unitFollows(terms, last + 1) || isClaimedBefore(terms, i - 1)) {
+      out.push(first);
+      continue;
+    }
+    const before = terms[i - 1];
+    const unsure = before?.kind === 'number' && first.text.length > 1 && !hasOtherFree(terms, i, last);
+    const text = terms.slice(i, last + 1).map((term) => term.text).join('');
+    const end = terms[last]!.end;
+    out.push(unsure ? { ...first, text: `${text}?`, end, value: Number.NaN } : { ...first, text: text.replace(',', '.'), end, value: Number(text.replace(',', '.')) });
+    i = last;
+  }
+  return out;
+}
+
+/**
+ * Joins numerals that are one number: fractions before a unit, and thousands grouped by blanks.
+ *
+ * @param terms The terms of a message.
+ * @returns The terms with such numbers as one; its `value` is NaN where the blank could also part two figures.
+ * @example
+ * ```ts
+ * joinNumbers(splitTerms(foldText('1 1/2 oz'), LEXICON))[0].value // => 1.5
+ * joinNumbers(splitTerms(foldText('free 20 800 gal'), LEXICON)).length // => 4
+ * ```
+ */
+export function joinNumbers(terms: readonly Term[]): Term[] {
+  return joinBlankGroups(joinFractions(terms));
+}

@@ -1,0 +1,50 @@
+import type { Lexicon } from './lexicon.ts';
+
+/** Ordinary words, and chemicals of another kind, that are one letter from a cellar word and none. */
+const NEVER = new Set([
+  'while', 'write', 'bottle', 'gallop', 'sugary', 'adder', 'tanks', 'thanks', 'carrel', 'quarrel', 'liter', 'latter',
+  'later', 'letter', 'lighter', 'volumes', 'tempo', 'tempt', 'temple', 'targe', 'barrelled', 'sugared', 'bonding',
+  'blinding', 'winding', 'finding', 'minding', 'sulfide', 'sulphide', 'sulfate', 'sulphate', 'bisulfide', 'metabisulfate',
+  'metabisulphate', 'bisulfate', 'bisulphate', 'disulfide', 'sulfone', 'sulfonate', 'organics', 'organist', 'organise',
+  'organize', 'parkling', 'darkling', 'butler', 'butter', 'batts', 'pupil', 'pints', 'pines', 'coasts', 'casts', 'tasks', 'masks',
+  'cakes', 'caves', 'cases', 'cash', 'cooking', 'totally', 'tonal', 'dental', 'petal', 'local', 'vocal', 'legal', 'royal',
+  'mortal', 'metal', 'portal', 'tidal', 'moral', 'loyal', 'totes', 'notes', 'votes', 'drums', 'drugs', 'bucket', 'packet',
+  'barley', 'barren', 'barred', 'parcel', 'forties', 'fortify', 'citrus', 'cirrus', 'copper', 'cooper', 'hopper', 'chopper', 'topper',
+]); // prettier-ignore
+
+/** Whether two words are one slip apart: a letter too many, too few, another, or two changed round. */
+function isOneSlip(a: string, b: string): boolean {
+  if (Math.abs(a.length - b.length) > 1) return false;
+  let i = 0;
+  while (i < a.length && a[i] === b[i]) i++;
+  const [x, y] = [a.slice(i), b.slice(i)];
+  return (
+    x.slice(1) === y.slice(1) ||
+    x.slice(1) === y ||
+    x === y.slice(1) ||
+    (x.length > 1 && x[0] === y[1] && x[1] === y[0] && x.slice(2) === y.slice(2))
+  );
+}
+
+/**
+ * Mends a misspelt word, but only where it can be one word alone, and never across a chemical border.
+ *
+ * @param word A folded word that is not known.
+ * @param lexicon The words that are known.
+ * @returns The word it must be, or undefined.
+ * @example
+ * ```ts
+ * mendWord('molecualr', LEXICON) // => 'molecular'
+ * mendWord('metabisulfate', LEXICON) // => undefined
+ * ```
+ */
+export function mendWord(word: string, lexicon: Lexicon): string | undefined {
+  if (word.length < 5 || word.length > 24 || NEVER.has(word) || lexicon.phrases.has(word)) return undefined;
+  let found: string | undefined;
+  for (const candidate of lexicon.mendable.get(word[0] ?? '') ?? []) {
+    if (!isOneSlip(word, candidate)) continue;
+    if (found !== undefined && lexicon.phrases.get(found)?.tags[0] !== lexicon.phrases.get(candidate)?.tags[0]) return undefined;
+    found ??= candidate;
+  }
+  return found;
+}

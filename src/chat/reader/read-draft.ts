@@ -1,0 +1,141 @@
+import type { Stage } from '../../core/wine.ts';
+import type { Board, Finder, Finding } from './board.ts';
+import { findingOf, holdsCue, isFound, placeOf } from './board.ts';
+import { findAdditiveVolume } from './finders/additive-volume.ts';
+import { findAdditive } from './finders/additive.ts';
+import { findAllowance } from './finders/allowance.ts';
+import { USUAL_BARREL_L, findBarrels } from './finders/barrels.ts';
+import { findKind } from './finders/kind.ts';
+import { findLabelled } from './finders/labels.ts';
+import { findLetterPair } from './finders/letter-pair.ts';
+import { findMass } from './finders/mass.ts';
+import { findNumberWord } from './finders/number-word.ts';
+import { findOtherAdditive } from './finders/other-additive.ts';
+import { findOtherFigures } from './finders/other-figures.ts';
+import { findPairs } from './finders/pairs.ts';
+import { findPastTense } from './finders/past-tense.ts';
+import { findPercentAndDegree } from './finders/percent-and-degree.ts';
+import { findPowderOrSO2 } from './finders/powder-or-so2.ts';
+import { findRate } from './finders/rate.ts';
+import { findSolutionUse } from './finders/solution-use.ts';
+import { findSpoon } from './finders/spoon.ts';
+import { findStage, mostCautious } from './finders/stage.ts';
+import { findTablets } from './finders/tablets.ts';
+import { findTarget } from './finders/target.ts';
+import { findVessel } from './finders/vessel.ts';
+import { findVolume } from './finders/volume.ts';
+import { settleBounds } from './refine/bounds.ts';
+import { settleConflicts } from './refine/conflicts.ts';
+import { decideIntent } from './refine/intent.ts';
+import { readUnlabelled } from './refine/unlabelled.ts';
+import type { Draft, FieldName, Fields, Place } from './understood.ts';
+
+/** From the most certain to the least: what one has claimed, no later one reads. */
+const FINDERS: readonly Finder[] = [
+  findStage,
+  findPastTense,
+  findLetterPair,
+  findVessel,
+  findOtherFigures,
+  findAllowance,
+  findSolutionUse,
+  findSpoon,
+  findRate,
+  findTablets,
+  findBarrels,
+  findAdditive,
+  findPowderOrSO2,
+  findAdditiveVolume,
+  findVolume,
+  findMass,
+  findNumberWord,
+  findTarget,
+  findLabelled,
+  findPercentAndDegree,
+  findKind,
+  findPairs,
+  findOtherAdditive,
+  readUnlabelled,
+  settleConflicts,
+  settleBounds,
+];
+
+/** Several vessels with one volume: of each, in all, or asked. */
+function shareVolume(board: Board, fields: Record<string, unknown>): void {
+  const vessels = findingOf(board, 'vessels')?.value;
+  if (vessels === undefined) return;
+  const volume = findingOf(board, 'volume_L')?.value;
+  const isBarrels = vessels[0]!.startsWith('barrel ') || /^B\d/.test(vessels[0]!);
+  if (volume === undefined) {
+    if (vessels[0]!.startsWith('barrel ')) {
+      board.marks.barrelsAssumed_L = vessels.length * USUAL_BARREL_L;
+      board.marks.barrelsCounted = true;
+    }
+  } else if (board.marks.statedEach || holdsCue(board, 'each') || (isBarrels && volume <= 700 && !holdsCue(board, 'altogether'))) {
+    fields['volume_L'] = volume * vessels.length;
+    board.notes.push({ id: 'each-or-total', text: `${volume} L` });
+  } else if (!holdsCue(board, 'altogether')) {
+    delete fields['volume_L'];
+    board.marks.eachOrTotal = true;
+    board.notes.push({ id: 'each-or-total', text: '' });
+  }
+}
+
+/** One numbered barrel without a size counts as a usual one. */
+function assumeBarrel(board: Board): void {
+  const vessel = findingOf(board, 'vessel')?.value;
+  if (vessel?.startsWith('barrel ') && !isFound(board, 'volume_L') && !board.marks.castsWithoutSize) board.marks.barrelsAssumed_L ??= USUAL_BARREL_L;
+}
+
+function fieldsOf(board: Board): Fields {
+  const fields: Record<string, unknown> = {};
+  for (const { field, value } of board.findings) if (field !== 'stage') fields[field] ??= value;
+  const stages = board.findings.filter((finding): finding is Finding<'stage'> => finding.field === 'stage').map(({ value }) => value as Stage);
+  const stage = mostCautious(stages);
+  if (stage) fields['stage'] = stage;
+  shareVolume(board, fields);
+  return fields as Fields;
+}
+
+function placesOf(board: Board): Partial<Record<FieldName, Place>> {
+  const places: Partial<Record<FieldName, Place>> = {};
+  for (const { field, from, to } of board.findings) places[field] ??= placeOf(board, from, to);
+  return places;
+}
+
+/** A weight of fruit named with a cask mark but taken by a vessel word. */
+function noteCask(board: Board): void {
+  const named = findingOf(board, 'vessel');
+  if (named && board.terms.slice(named.from, named.to + 1).some((_, k) => board.terms[named.from + k]!.tags.includes('vessel:cask'))) board.marks.castsWithoutSize = true;
+}
+
+/**
+ * Runs every finder and refiner over a board, and says what the message wants.
+ *
+ * @param board The table with the terms of one line or message; it is written on.
+ */
+export function readDraft(board: Board): Draft {
+  for (const find of FINDERS) find(board);
+  noteCask(board);
+  assumeBarrel(board);
+  const intent = decideIntent(board);
+  const fields = fieldsOf(board);
+  if (intent === 'chat') return { intent, fields: {}, problems: [], setAside: [], notes: board.notes.filter(({ id }) => id === 'negated'), marks: {}, where: {} };
+  if (intent === 'dose' && isFound(board, 'mass_g')) board.notes.push({ id: 'mass-beside-readings', text: '' });
+  if (board.marks.fruitByWeight) board.notes.push({ id: 'fruit-by-weight', text: '' });
+  const { strengthAsSalt, volumeUnit, containers, concentrationUnit } = board.marks;
+  return {
+    intent,
+    fields,
+    problems: board.problems,
+    setAside: board.setAside,
+    notes: board.notes,
+    marks: board.marks,
+    where: placesOf(board),
+    ...(strengthAsSalt && { strength_of: 'salt' as const }),
+    ...(volumeUnit && { volumeUnit }),
+    ...(containers !== undefined && { containers }),
+    ...(concentrationUnit && { concentrationUnit }),
+  };
+}
+

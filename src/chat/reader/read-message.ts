@@ -1,0 +1,108 @@
+import type { Waiting } from '../conversation/memory.ts';
+import type { Board } from './board.ts';
+import { recogniseEmergency } from './emergency.ts';
+import { finishReading } from './finish-reading.ts';
+import type { FoldedText } from './fold-text.ts';
+import { foldText } from './fold-text.ts';
+import { joinNumbers } from './join-numbers.ts';
+import { LEXICON } from './lexicon.ts';
+import { linesOf } from './lines.ts';
+import { groupingOf } from './message-language.ts';
+import { readDraft } from './read-draft.ts';
+import { readRound } from './read-round.ts';
+import type { Term } from './split-terms.ts';
+import { splitTerms } from './split-terms.ts';
+import { isStrange, topicOf } from './topic.ts';
+import type { Draft, Reading, ReaderSettings, Understood } from './understood.ts';
+import { readWaiting } from './waiting-answer.ts';
+import type { Tag } from './words/words.ts';
+
+/** The longest message that is read, in UTF-16 units; the platform's own limit. */
+export const LONGEST_MESSAGE = 4096;
+
+/** Tags of all words and phrases of some terms, shorter phrases inside longer ones included. */
+function cuesOf(terms: readonly Term[]): ReadonlySet<Tag> {
+  const words = terms.flatMap(({ kind, text }) => (kind === 'word' ? text.split(/[ -]/) : ['\n']));
+  const cues = new Set<Tag>();
+  for (let i = 0; i < words.length; i++) {
+    const most = LEXICON.longest.get(words[i]!) ?? 0;
+    for (let n = 1, phrase = words[i]!; n <= most; n++, phrase = `${phrase} ${words[i + n - 1] ?? '\n'}`) {
+      for (const tag of LEXICON.phrases.get(phrase)?.tags ?? []) cues.add(tag);
+    }
+  }
+  for (const { tags } of terms) for (const tag of tags) cues.add(tag);
+  return cues;
+}
+
+/** A fresh table for some terms of a message. */
+export function setBoard(message: string, folded: FoldedText, terms: readonly Term[], settings: ReaderSettings): Board {
+  return {
+    message,
+    folded,
+    terms,
+    taken: [],
+    cues: cuesOf(terms),
+    grouping: groupingOf(terms, settings.language),
+    settings,
+    findings: [],
+    problems: [],
+    notes: [],
+    setAside: [],
+    marks: {},
+    pastTense: false,
+  };
+}
+
+const empty = (intent: Reading['intent'], more: Partial<Draft> = {}): Reading => ({
+  intent,
+  fields: {},
+  assumed: {},
+  asks: [],
+  problems: [],
+  setAside: [],
+  notes: [],
+  marks: {},
+  where: {},
+  ...more,
+});
+
+function readOne(board: Board, settings: ReaderSettings): Reading {
+  const draft = readDraft(board);
+  if (draft.intent !== 'chat') return finishReading(draft, settings);
+  const topic = topicOf(board);
+  if (topic !== undefined) return empty('chat', { topic });
+  const problems = isStrange(board) ? [{ code: 'not-understood' as const, about: '' }] : [];
+  return empty('chat', { problems, notes: draft.notes });
+}
+
+/**
+ * Reads a message: the one door of the reader. Never throws, whatever the text holds.
+ *
+ * @param text The message as it came.
+ * @param settings What has to be known of the chat.
+ * @param waiting The question that the bot still waits for, so that a bare number is its answer.
+ * @returns The readings, each with what was said, assumed, asked and wrong.
+ * @example
+ * ```ts
+ * readMessage('T4 1450 gal pH 3.58 free 21', READER_DEFAULTS).readings[0].fields.vessel // => 'tank 4'
+ * readMessage('hi', READER_DEFAULTS).readings[0].intent // => 'chat'
+ * ```
+ */
+export function readMessage(text: string, settings: ReaderSettings, waiting?: Waiting): Understood {
+  const decimalMark = /\d,\d{1,2}(?!\d)/.test(text) && !/\d\.\d/.test(text) ? ',' : '.';
+  const understood = (readings: readonly Reading[], shared = {}, language = settings.language): Understood => ({ readings, shared, language, decimalMark });
+  if (text.length > LONGEST_MESSAGE) {
+    const danger = recogniseEmergency(foldText(text.slice(0, LONGEST_MESSAGE)).text, settings.language);
+    return danger ? understood([empty('emergency')], {}, danger) : understood([empty('chat', { problems: [{ code: 'too-long', about: '' }] })]);
+  }
+  const folded = foldText(text);
+  const danger = recogniseEmergency(folded.text, settings.language);
+  if (danger) return understood([empty('emergency')], {}, danger);
+  const answer = waiting && readWaiting(folded.text.trim(), waiting, settings);
+  if (answer) return understood([answer]);
+  const terms = joinNumbers(splitTerms(folded, LEXICON));
+  const lines = linesOf(terms);
+  const round = lines.length > 1 ? readRound(lines, (line) => setBoard(text, folded, line, settings), settings) : undefined;
+  if (round) return understood(round.readings, round.shared);
+  return understood([readOne(setBoard(text, folded, terms, settings), settings)]);
+}

@@ -1,0 +1,52 @@
+import type { ProblemCode } from '../../../core/problem.ts';
+import type { Target } from '../../../core/wine.ts';
+import type { Board, Finding } from '../board.ts';
+import { placeOf } from '../board.ts';
+
+/** The least and most of each field that a cellar has; own thresholds, to keep slips out. No source. */
+const CELLAR_BOUNDS: Readonly<Record<string, readonly [number, number]>> = {
+  volume_L: [0, 10_000_000],
+  free_mg_L: [0, 1000],
+  total_mg_L: [0, 1000],
+  temperature_C: [-15, 60],
+  alcohol_percent: [0, 25],
+  sugar_g_L: [0, 600],
+  mass_g: [0, 100_000_000],
+  additive_volume_mL: [0, 10_000_000_000],
+  rate_mg_L: [0, 100_000],
+  added_mg_L: [0, 1000],
+  tablets: [0, 10_000],
+  tablet_SO2_g: [0.1, 100],
+  tablet_salt_g: [0.05, 2],
+  binding_allowance_percent: [0, 400],
+  binding_share: [0, 0.8],
+};
+
+const targetFigure = (target: Target): readonly [number, number] => {
+  if ('molecular_mg_L' in target) return [target.molecular_mg_L, 10];
+  return 'free_mg_L' in target ? [target.free_mg_L, 1000] : [target.add_mg_L, 1000];
+};
+
+function problemOf({ field, value }: Finding): ProblemCode | undefined {
+  if (field === 'ph') return (value as number) >= 2.5 && (value as number) <= 4.8 ? undefined : 'ph-out-of-range';
+  if (field === 'target') {
+    const [figure, most] = targetFigure(value as Target);
+    return figure > most ? 'value-out-of-range' : undefined;
+  }
+  const bounds = CELLAR_BOUNDS[field];
+  if (!bounds || typeof value !== 'number') return undefined;
+  if (field === 'volume_L' && value <= 0) return 'volume-not-positive';
+  if (value < 0 && field !== 'temperature_C') return 'negative-value';
+  return value >= bounds[0] && value <= bounds[1] ? undefined : 'value-out-of-range';
+}
+
+/** Refuses what cannot be true: a pH of 36, a tank of 50 million litres. */
+export function settleBounds(board: Board): void {
+  for (let i = board.findings.length - 1; i >= 0; i--) {
+    const finding = board.findings[i]!;
+    const code = problemOf(finding);
+    if (code === undefined) continue;
+    board.problems.push({ code, about: placeOf(board, finding.from, finding.to).text });
+    board.findings.splice(i, 1);
+  }
+}

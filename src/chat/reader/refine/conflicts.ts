@@ -1,0 +1,45 @@
+import type { ProblemCode } from '../../../core/problem.ts';
+import type { Board, Finding } from '../board.ts';
+import { findingOf, placeOf } from '../board.ts';
+import type { FieldName } from '../understood.ts';
+
+const drop = (board: Board, fields: readonly FieldName[]): void => {
+  for (let i = board.findings.length - 1; i >= 0; i--) if (fields.includes(board.findings[i]!.field)) board.findings.splice(i, 1);
+};
+
+const key = (finding: Finding): string => JSON.stringify(finding.value);
+
+/** The same field twice with different values: named both times it is a conflict, bare it is unclear. */
+function settleTwice(board: Board): void {
+  const byField = new Map<FieldName, Finding[]>();
+  for (const finding of board.findings) byField.set(finding.field, [...(byField.get(finding.field) ?? []), finding]);
+  for (const [field, findings] of byField) {
+    if (findings.length < 2 || new Set(findings.map(key)).size === 1 || field === 'stage') continue;
+    const code: ProblemCode = findings.some(({ said }) => said === 'bare') ? 'ambiguous-number' : 'conflicting-values';
+    board.problems.push({ code, about: findings.map(({ from, to }) => placeOf(board, from, to).text).join(' / ') });
+    drop(board, [field]);
+  }
+}
+
+/** A total below the free SO2 cannot be. */
+function settleTotal(board: Board): void {
+  const [free, total] = [findingOf(board, 'free_mg_L'), findingOf(board, 'total_mg_L')];
+  if (!free || !total || total.value >= free.value) return;
+  board.problems.push({ code: 'total-below-free', about: `${placeOf(board, free.from, free.to).text} / ${placeOf(board, total.from, total.to).text}` });
+  drop(board, ['free_mg_L', 'total_mg_L']);
+}
+
+/** Two vessels in one message are no one reading. */
+function settleVessels(board: Board): void {
+  const [one, many] = [findingOf(board, 'vessel'), findingOf(board, 'vessels')];
+  if (!one || !many) return;
+  board.problems.push({ code: 'conflicting-values', about: placeOf(board, one.from, many.to).text });
+  drop(board, ['vessel', 'vessels']);
+}
+
+/** Settles findings that contradict each other: as problems, never by choosing. */
+export function settleConflicts(board: Board): void {
+  settleTwice(board);
+  settleTotal(board);
+  settleVessels(board);
+}

@@ -1,0 +1,147 @@
+import type { FoldedText } from './fold-text.ts';
+import type { Entry, Lexicon } from './lexicon.ts';
+import type { Tag } from './words/words.ts';
+import { mendWord } from './mend-word.ts';
+
+/** One piece of a message: a numeral, a word or phrase, a mark, or a line's end. */
+export interface Term {
+  readonly kind: 'number' | 'word' | 'mark' | 'break';
+  readonly text: string;
+  /** Offsets in the folded text. */
+  readonly start: number;
+  readonly end: number;
+  /** Whether a blank stands before it. */
+  readonly gap: boolean;
+  readonly tags: readonly Tag[];
+  /** Set where the piece is a fraction, so that its figure is settled. */
+  readonly value?: number;
+  /** All letters of it were capitals. */
+  readonly capital: boolean;
+}
+
+const VULGAR: Readonly<Record<string, number>> = {
+  '½': 1 / 2, '⅓': 1 / 3, '⅔': 2 / 3, '¼': 1 / 4, '¾': 3 / 4, '⅛': 1 / 8, '⅜': 3 / 8, '⅝': 5 / 8, '⅞': 7 / 8,
+}; // prettier-ignore
+
+const NONE: readonly Tag[] = [];
+const isDigit = (c: string | undefined): boolean => c !== undefined && c >= '0' && c <= '9';
+const isLetter = (c: string | undefined): boolean => c !== undefined && (c >= 'a' && c <= 'z' ? true : c > '\u00bf' && /\p{L}/u.test(c));
+
+function numeralEnd(text: string, from: number): number {
+  let i = from;
+  while (isDigit(text[i])) i++;
+  while ((text[i] === '.' || text[i] === ',' || text[i] === "'") && isDigit(text[i + 1])) {
+    i++;
+    while (isDigit(text[i])) i++;
+  }
+  return i;
+}
+
+function wordEnd(text: string, from: number, lexicon: Lexicon): number {
+  for (const formula of lexicon.formulas.get(text[from] ?? '') ?? []) {
+    const end = from + formula.length;
+    if (text.startsWith(formula, from) && !isDigit(text[end])) return end;
+  }
+  let i = from;
+  while (isLetter(text[i]) || (text[i] === "'" && isLetter(text[i + 1]))) i++;
+  return Math.max(i, from + 1);
+}
+
+/** Known words run together beside a figure (`galph` in `1150galph3.55`): each piece a unit or a label. */
+function unglue(word: string, lexicon: Lexicon): readonly string[] | undefined {
+  if (word.length < 3 || word.length > 24 || lexicon.phrases.has(word)) return undefined;
+  for (let cut = 1; cut < word.length; cut++) {
+    const [left, right] = [word.slice(0, cut), word.slice(cut)];
+    const fits = (part: string): boolean =>
+      (lexicon.phrases.get(part)?.tags ?? NONE).some((tag) => /^(unit:(?!none)|label|additive|cue:(target|add|molecular)$)/.test(tag));
+    if (fits(left) && fits(right)) return [left, right];
+  }
+  return undefined;
+}
+
+/** The pieces before words are looked up. */
+function cut(folded: FoldedText, lexicon: Lexicon): Term[] {
+  const { text } = folded;
+  const pieces: Term[] = [];
+  let gap = true;
+  const push = (kind: Term['kind'], start: number, end: number, value?: number): void => {
+    const capital = kind === 'word' && folded.capital[start] === true && folded.capital[end - 1] === true;
+    pieces.push({ kind, text: text.slice(start, end), start, end, gap, tags: NONE, capital, ...(value === undefined ? {} : { value }) });
+    gap = false;
+  };
+  for (let i = 0; i < text.length; ) {
+    const c = text[i] ?? '';
+    if (c === ' ') { gap = true; i++; continue; } // prettier-ignore
+    if (c === '\n') { push('break', i, i + 1); gap = true; i++; continue; } // prettier-ignore
+    let end = i + 1;
+    if (isDigit(c) || (c === '.' && isDigit(text[i + 1]) && !isDigit(text[i - 1]) && !isLetter(text[i - 1]))) {
+      end = c === '.' ? numeralEnd(text, i + 1) : numeralEnd(text, i);
+      push('number', i, end);
+    } else if (VULGAR[c] !== undefined) {
+      push('number', i, end, VULGAR[c]);
+    } else if (isLetter(c)) {
+      end = wordEnd(text, i, lexicon);
+      const beside = isDigit(text[i - 1]) || isDigit(text[end]);
+      const parts = beside ? unglue(text.slice(i, end), lexicon) : undefined;
+      if (parts) for (let at = i, k = 0; k < parts.length; at += parts[k++]!.length) push('word', at, at + parts[k]!.length);
+      else push('word', i, end);
+    } else if ((c === '-' || c === '=') && text[i + 1] === '>') {
+      end = i + 2;
+      push('mark', i, end);
+    } else {
+      if (c >= '\ud800' && c <= '\udbff' && i + 1 < text.length) end = i + 2;
+      push('mark', i, end);
+    }
+    i = end;
+  }
+  return pieces;
+}
+
+/** The longest known phrase that begins at piece `i`; words of a phrase have a blank or a hyphen between. */
+function phraseAt(pieces: readonly Term[], i: number, lexicon: Lexicon): { entry: Entry; next: number } | undefined {
+  const first = pieces[i]!;
+  const most = lexicon.longest.get(first.text) ?? 0;
+  let text = '';
+  let found: { entry: Entry; next: number } | undefined;
+  for (let k = i, words = 0; words < most && k < pieces.length; words++) {
+    const piece = pieces[k]!;
+    if (piece.kind !== 'word' && !(piece.kind === 'number' && words > 0 && piece.text === '2')) break;
+    text = words === 0 ? piece.text : `${text} ${piece.text}`;
+    k++;
+    const entry = lexicon.phrases.get(text);
+    if (entry) found = { entry, next: k };
+    const hyphen = pieces[k];
+    if (hyphen?.kind === 'mark' && hyphen.text === '-' && !hyphen.gap && pieces[k + 1]?.gap === false) k++;
+  }
+  return found;
+}
+
+/**
+ * Splits a folded message into terms and looks its words up, the longest phrase first.
+ *
+ * @param folded The message made plain.
+ * @param lexicon The words that are known.
+ * @returns The terms in order; every character but blanks belongs to one.
+ * @example
+ * ```ts
+ * splitTerms(foldText('free so2 18'), LEXICON).map((term) => term.text) // => ['free so2', '18']
+ * ```
+ */
+export function splitTerms(folded: FoldedText, lexicon: Lexicon): Term[] {
+  const pieces = cut(folded, lexicon);
+  const terms: Term[] = [];
+  for (let i = 0; i < pieces.length; ) {
+    const piece = pieces[i]!;
+    const found = piece.kind === 'word' ? phraseAt(pieces, i, lexicon) : undefined;
+    if (!found) {
+      const mended = piece.kind === 'word' ? mendWord(piece.text, lexicon) : undefined;
+      terms.push(mended ? { ...piece, tags: lexicon.phrases.get(mended)!.tags } : piece);
+      i++;
+      continue;
+    }
+    const last = pieces[found.next - 1]!;
+    terms.push({ ...piece, text: folded.text.slice(piece.start, last.end), end: last.end, tags: found.entry.tags });
+    i = found.next;
+  }
+  return terms;
+}

@@ -1,0 +1,61 @@
+import type { AdditiveId } from '../../../core/additives/additive-id.ts';
+import type { Category, Product, Stage, Style } from '../../../core/wine.ts';
+import type { Language } from '../understood.ts';
+
+/** Units a person writes; `gal` is the gallon that the chat's setting decides. */
+export type UnitId =
+  | 'L' | 'mL' | 'cL' | 'hL' | 'm3' | 'galUS' | 'galUK' | 'gal' | 'floz'
+  | 'g' | 'mg' | 'kg' | 'lb' | 'oz' | 'ton' | 'quintal'
+  | 'ppm' | 'mg/L' | 'g/hL' | 'g/L' | 'C' | 'F' | 'degree' | 'spoon' | 'none-of-ours'; // prettier-ignore
+
+/** Words that stand before or after a figure and say what it is; `aside` is a figure that is none of ours. */
+export type LabelId =
+  'ph' | 'free' | 'total' | 'so2' | 'temperature' | 'alcohol' | 'sugar' | 'volume' | 'aside';
+
+/** Ways of naming an additive: `unnamed` lacks its cation, `none` is an additive that is none of ours. */
+export type AdditiveWord = AdditiveId | 'campden' | 'campden-potassium' | 'campden-sodium' | 'unnamed' | 'none';
+
+/** Small words that steer the reading. */
+export type CueId =
+  | 'target' | 'to' | 'from' | 'raise' | 'up' | 'add' | 'need' | 'addition' | 'molecular' | 'by'
+  | 'binds' | 'binding' | 'no-binding' | 'extra' | 'third' | 'half' | 'quarter' | 'two-thirds' | 'three-quarters'
+  | 'each' | 'altogether' | 'per' | 'in' | 'of' | 'with' | 'is' | 'and' | 'article' | 'correction'
+  | 'past' | 'if' | 'not' | 'not-yet' | 'question' | 'how-much' | 'reading' | 'vessel-statement'
+  | 'water' | 'holding' | 'cleaning' | 'make-up' | 'solution' | 'salt-word' | 'powder' | 'gas' | 'fill' | 'size'
+  | 'thousand' | 'number-word' | 'number-sign' | 'bottle-unit' | 'tablet' | 'sachet' | 'effervescent' | 'joined'
+  | 'ml' | 'ml-around' | 'ml-over' | 'ml-without' | 'ml-bugs' | 'over' | 'stop' | 'ferment' | 'past-ferment'
+  | 'fruit' | 'wine' | 'verb' | 'pronoun' | 'time-before' | 'month' | 'lot' | 'variety'
+  | 'greeting' | 'thanks' | 'help' | 'cellar' | 'plain' | 'potassium' | 'sodium' | 'yet'; // prettier-ignore
+
+/** What a word is. */
+export type Tag =
+  | `unit:${UnitId}`
+  | `label:${LabelId}`
+  | `cue:${CueId}`
+  | `additive:${AdditiveWord}`
+  | `style:${Style}`
+  | `category:${Category}`
+  | `product:${Product}`
+  | `stage:${Stage}`
+  | 'vessel:tank'
+  | 'vessel:barrel'
+  | 'vessel:cask'
+  | 'vessel:other'
+  | 'organic';
+
+/** The groups of words that together make an emergency; `emergency.ts` holds the rules. */
+export type DangerId =
+  | 'down' | 'breathless' | 'person' | 'thing' | 'silent' | 'went-in' | 'hurt-eye' | 'swallowed' | 'drank' | 'vessel'
+  | 'gas' | 'leak' | 'alarm' | 'elsewhere' | 'burnt' | 'chemical'; // prettier-ignore
+
+/**
+ * All that people write in one language: data only. Entries are lower case without accents; an entry of
+ * several words matches them with one blank or hyphen between. A word may stand under several tags.
+ */
+export interface Words {
+  readonly language: Language;
+  /** The separator that groups thousands in this language; empty where only a blank does. */
+  readonly groups: '.' | ',' | '';
+  readonly says: Readonly<Partial<Record<Tag, readonly string[]>>>;
+  readonly danger: Readonly<Partial<Record<DangerId, readonly string[]>>>;
+}
