@@ -28,6 +28,8 @@ export interface Memory {
    * that follows is asked about, never taken.
    */
   readonly askedTargetAt?: number;
+  /** The decimal mark that this person wrote with last; a press has none of its own. */
+  readonly decimalMark?: '.' | ',';
   /** The day (UTC date) on which this person last got an additive's cautions in full. */
   readonly cautionedOn: Readonly<Record<string, string>>;
 }

@@ -18,6 +18,10 @@ export interface Line {
   readonly room: Room;
   readonly key: string;
   readonly values: Readonly<Record<string, string>>;
+  /** Said one after the other with `<key>-separator` or `list-separator` between, and handed in as `$list`. */
+  readonly list?: readonly Omit<Line, 'room'>[];
+  /** The language of this line, where it is not the reply's own. */
+  readonly language?: Language;
 }
 
 /** A button: on a phone it is tapped, on a keyboard its mark (number or letter) is typed. */

@@ -1,0 +1,6 @@
+### What we say, in Deutsch. So far only what an emergency needs; the rest is said in English.
+
+emergency-out = ALLE RAUS an die frische Luft, sofort.
+emergency-nobody-in = Niemand steigt oder beugt sich jemandem hinterher.
+emergency-call = Den Notruf wählen.
+emergency-eyes = Augen: 15 Minuten mit Wasser spülen, Kontaktlinsen heraus.

@@ -1,0 +1,6 @@
+### What we say, in español. So far only what an emergency needs; the rest is said in English.
+
+emergency-out = TODOS FUERA, al aire libre, ya.
+emergency-nobody-in = Nadie entra ni se asoma detrás de nadie.
+emergency-call = Llamad a emergencias.
+emergency-eyes = Ojos: enjuagar con agua 15 minutos y quitar las lentillas.

@@ -1,0 +1,6 @@
+### What we say, in français. So far only what an emergency needs; the rest is said in English.
+
+emergency-out = TOUT LE MONDE DEHORS, à l’air libre, tout de suite.
+emergency-nobody-in = Personne n’entre ni ne se penche pour aller chercher quelqu’un.
+emergency-call = Appelez les secours.
+emergency-eyes = Yeux : rincer à l’eau pendant 15 minutes, enlever les lentilles.

@@ -1,0 +1,6 @@
+### What we say, in italiano. So far only what an emergency needs; the rest is said in English.
+
+emergency-out = TUTTI FUORI all’aria aperta, subito.
+emergency-nobody-in = Nessuno entra o si sporge dentro per soccorrere qualcuno.
+emergency-call = Chiamate i soccorsi.
+emergency-eyes = Occhi: sciacquare con acqua per 15 minuti, togliere le lenti a contatto.

@@ -1,0 +1,6 @@
+### What we say, in português. So far only what an emergency needs; the rest is said in English.
+
+emergency-out = TODOS PARA FORA, para o ar livre, já.
+emergency-nobody-in = Ninguém entra nem se debruça atrás de ninguém.
+emergency-call = Liguem para a emergência.
+emergency-eyes = Olhos: lavar com água durante 15 minutos, tirar as lentes de contacto.

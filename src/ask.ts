@@ -1,0 +1,9 @@
+import { runAsk } from './edge/ask/run-ask.ts';
+
+process.exitCode = await runAsk({
+  args: process.argv.slice(2),
+  input: process.stdin,
+  output: process.stdout,
+  tell: (sentence) => void process.stderr.write(`${sentence}\n`),
+  now: () => Date.now(),
+});

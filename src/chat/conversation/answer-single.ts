@@ -1,0 +1,64 @@
+import type { Reading, Understood } from '../reader/understood.ts';
+import type { DecimalMark } from '../replies/number-text.ts';
+import type { Reply } from '../replies/reply.ts';
+import { answerReading } from './answer-reading.ts';
+import { letterButtons } from './buttons.ts';
+import { completes } from './complete.ts';
+import { questionLine } from './lines/question.ts';
+import { mannerOf } from './manner.ts';
+import type { Memory, Waiting } from './memory.ts';
+import { cautionedToday, keeping, nextMemory, waitFor } from './next-memory.ts';
+import type { Outcome } from './outcome.ts';
+import type { Handled, IncomingMessage } from './ports.ts';
+import type { Settings } from './settings.ts';
+import { choicesFor, stillWaiting } from './waiting.ts';
+import { withShared } from './with-shared.ts';
+
+/** One reading: its answer, the reply, and what is kept for the next message. */
+export function answerSingle(
+  message: IncomingMessage,
+  understood: Understood,
+  memory: Memory,
+  settings: Settings,
+): Handled {
+  const [first] = understood.readings;
+  if (!first) return { writes: [], replies: [], understood, answers: [] };
+  const reading = withShared(first, understood.shared);
+  const outcome = answerReading(reading, understood.language, {
+    settings,
+    manner: mannerOf(reading, understood.decimalMark, settings),
+    number: memory.nextNumber,
+    cautioned: cautionedToday(memory, message.at),
+  });
+  const kept = keepsWaiting(reading, stillWaiting(memory, message.at));
+  const asked =
+    kept && reading.problems.length > 0
+      ? askAgain(kept, outcome, memory, understood.decimalMark, settings)
+      : outcome;
+  const waiting = outcome.waits === undefined ? kept : waitFor(outcome.waits, reading, message.at, settings);
+  const reply: Reply = { language: settings.language, lines: asked.lines, buttons: asked.buttons };
+  const next = nextMemory(memory, message.at, understood, [{ reading, outcome }], {
+    buttons: reply.buttons,
+    waiting,
+  });
+  return { writes: keeping(message, next), replies: [reply], understood, answers: [outcome.answer] };
+}
+
+/** Talk in between leaves a question waiting, and so does a slip in the answer to it. */
+function keepsWaiting(reading: Reading, waiting: Waiting | undefined): Waiting | undefined {
+  if (!waiting || reading.intent === 'chat') return waiting;
+  return reading.problems.length > 0 && completes(waiting.reading, reading) ? waiting : undefined;
+}
+
+function askAgain(
+  { field, reading }: Waiting,
+  outcome: Outcome,
+  memory: Memory,
+  mark: DecimalMark,
+  settings: Settings,
+): Pick<Outcome, 'lines' | 'buttons'> {
+  const number = memory.remembered.findLast((one) => one.reading === reading)?.number;
+  const buttons =
+    number === undefined ? [] : letterButtons(number, field, choicesFor(field, reading, settings), mark);
+  return { lines: [...outcome.lines, questionLine(field, reading, settings)], buttons };
+}

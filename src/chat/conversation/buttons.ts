@@ -1,0 +1,91 @@
+import type { DoseChoice } from '../../core/dose/answer.ts';
+import type { AskedField, Fields } from '../reader/understood.ts';
+import { numberText, type DecimalMark } from '../replies/number-text.ts';
+import type { Button, Line } from '../replies/reply.ts';
+import { perLitre, type Manner } from './manner.ts';
+import { letterAt } from './waiting.ts';
+
+/** What a button does; its key is `does:number`, of a choice `does:number:which`. */
+export type Does = 'w' | 's' | 't' | 'm' | 'nf' | 'red' | 'c' | 'l';
+
+/** At most so many buttons stand under a dose. */
+export const MOST_BUTTONS = 4;
+
+const LABELS = {
+  nf: 'button-not-finished',
+  red: 'button-red',
+  w: 'button-working',
+  s: 'button-safety',
+  t: 'button-target',
+  m: 'button-more',
+} as const satisfies Partial<Record<Does, string>>;
+
+/** The plain buttons of a remembered reading, marked 1, 2, 3 … as they stand. */
+export function buttonsFor(number: number, does: readonly (keyof typeof LABELS)[]): Button[] {
+  return does.map((one, at) => ({
+    key: `${one}:${number}`,
+    mark: String(at + 1),
+    label: LABELS[one],
+    values: {},
+  }));
+}
+
+/** Which buttons apply under a dose. */
+export interface Applies {
+  readonly stageAssumed: boolean;
+  readonly mayBeRed: boolean;
+  readonly cautionsShort: boolean;
+}
+
+/**
+ * The weightiest four under a dose: the stage, the colour, the cautions where they stand in one line, the working,
+ * another target; `More` comes last and leads to all the rest.
+ */
+export function doseButtons(number: number, applies: Applies): Button[] {
+  const all = [
+    ...(applies.stageAssumed ? (['nf'] as const) : []),
+    ...(applies.mayBeRed ? (['red'] as const) : []),
+    ...(applies.cautionsShort ? (['s'] as const) : []),
+    'w' as const,
+    't' as const,
+  ];
+  return buttonsFor(number, [...all.slice(0, MOST_BUTTONS - 1), 'm']);
+}
+
+/** A button for each way out of a choice, then all the rest. */
+export function choiceButtons(number: number, choices: readonly DoseChoice[], manner: Manner): Button[] {
+  const ways = choices.map((choice, at): Button => {
+    const values: Line['values'] = { free: perLitre(choice.free_mg_L, manner) };
+    const label = choice.target === undefined ? 'button-choice-leave' : 'button-choice-to';
+    return { key: `c:${number}:${at}`, mark: String(at + 1), label, values };
+  });
+  return [...ways, { key: `m:${number}`, mark: String(ways.length + 1), label: LABELS.m, values: {} }];
+}
+
+/** A button for each value of the field that is asked, marked with its letter. */
+export function letterButtons(
+  number: number,
+  field: AskedField,
+  choices: readonly Fields[],
+  mark: DecimalMark,
+): Button[] {
+  return choices.map((fields, at) => ({
+    key: `l:${number}:${letterAt(at)}`,
+    mark: letterAt(at),
+    label: `choice-${field}`,
+    values: { value: choiceText(fields, mark) },
+  }));
+}
+
+function choiceText({ additive, tablet_salt_g, tablet_SO2_g }: Fields, mark: DecimalMark): string {
+  return additive ?? numberText(tablet_salt_g ?? tablet_SO2_g ?? 0, 2, mark);
+}
+
+/** A button's key taken apart; undefined for one that we never made. */
+export function parseKey(
+  key: string,
+): { readonly does: Does; readonly number: number; readonly which: string } | undefined {
+  const match = /^(w|s|t|m|nf|red|c|l):(\d{1,9})(?::([a-z]|\d))?$/.exec(key);
+  if (!match) return undefined;
+  return { does: match[1] as Does, number: Number(match[2]), which: match[3] ?? '' };
+}

@@ -1,0 +1,136 @@
+import { dose } from '../../../core/dose/dose.ts';
+import type { DoseAnswer, WarningCode } from '../../../core/dose/answer.ts';
+import type { DoseRequest } from '../../../core/dose/request.ts';
+import type { Reading } from '../../reader/understood.ts';
+import { choiceButtons, doseButtons } from '../buttons.ts';
+import { assumedLines } from '../lines/assumed.ts';
+import { cautionLines } from '../lines/cautions.ts';
+import { choiceLines } from '../lines/choice.ts';
+import { conditionLines, redFigures, redValues } from '../lines/condition.ts';
+import { expectationLines } from '../lines/expectation.ts';
+import { factLines } from '../lines/facts.ts';
+import { firstOfDose, hasAmount } from '../lines/first-dose.ts';
+import { line } from '../lines/line.ts';
+import { numberText } from '../../replies/number-text.ts';
+import { nothingLines, saidNothingNeeded } from '../lines/nothing-needed.ts';
+import { vesselText } from '../lines/vessel.ts';
+import { warningLines } from '../lines/warnings.ts';
+import { workingLines } from '../lines/working.ts';
+import type { Outcome, Turn } from '../outcome.ts';
+import { additiveOf, toDoseRequest } from '../to-requests.ts';
+import { fermentStop } from './ferment-stop.ts';
+import { noDose } from './no-dose.ts';
+import { partialDose } from './partial-dose.ts';
+
+/** Each way out of a choice says for itself how much it takes and whether it may be taken. */
+const SAID_BY_THE_CHOICE: readonly WarningCode[] = [
+  'free-needed-high',
+  'addition-large',
+  'total-over-limit',
+  'total-near-limit',
+  'total-unknown',
+];
+
+/** The answer to a question for a dose: no sulfite now, a choice, a dose, or what can be said so far and one question. */
+export function answerDose(reading: Reading, turn: Turn): Outcome {
+  const request = toDoseRequest(reading, turn.settings.basis);
+  const answer = dose(request);
+  if (reading.notes.some(({ id }) => id === 'ferment-stop')) return fermentStop(reading, {}, turn);
+  const refused = noDose(reading, answer, turn);
+  if (refused) return refused;
+  if (reading.asks.length > 0) return partialDose(reading, request, answer, turn);
+  if (answer.choices) return choice(reading, answer, turn);
+  if (saidNothingNeeded(answer)) return nothing(reading, answer, turn);
+  return wholeDose(reading, request, answer, turn);
+}
+
+function wholeDose(reading: Reading, request: DoseRequest, answer: DoseAnswer, turn: Turn): Outcome {
+  const additive = additiveOf(reading);
+  if (additive === undefined || !hasAmount(answer)) return partialDose(reading, request, answer, turn);
+  const { manner, number } = turn;
+  const inFull = !turn.cautioned.has(additive.id);
+  const first = firstOfDose(vesselText(reading), answer, additive, manner);
+  const red = redFigures(answer);
+  const condition = conditionLines(reading, answer, manner);
+  return {
+    answer,
+    inRound: [
+      ...first,
+      ...(red ? [line('first', 'condition-red', redValues(red, manner))] : []),
+      ...warningLines(answer.warnings, manner, 'first'),
+    ],
+    lines: [
+      ...first,
+      ...condition,
+      ...expectationLines(reading, answer, otherArithmetic(request), manner),
+      ...factLines(reading, manner),
+      ...assumedLines(reading, manner),
+      ...workingLines(answer.steps, manner.mark),
+      ...warningLines(answer.warnings, manner, 'warning', lowIsSaid(reading)),
+      ...cautionLines(additive.id, inFull),
+    ],
+    buttons: doseButtons(number, {
+      stageAssumed: reading.assumed.stage !== undefined,
+      mayBeRed: redFigures(answer) !== undefined,
+      cautionsShort: !inFull,
+    }),
+    ...(inFull && { cautioned: additive.id }),
+  };
+}
+
+/** Without allowance or share the line about landing says what a low free SO2 means. */
+function lowIsSaid({ fields }: Reading): readonly WarningCode[] {
+  const stated = fields.binding_allowance_percent ?? fields.binding_share;
+  return stated === undefined && fields.free_mg_L !== undefined ? ['free-low-may-bind-all'] : [];
+}
+
+/** The same question with a share added read as a share lost, and the other way round; undefined with neither. */
+function otherArithmetic(request: DoseRequest): DoseAnswer | undefined {
+  const { binding_allowance_percent: percent, binding_share: share, ...rest } = request;
+  if (percent !== undefined && percent > 0 && percent <= 80)
+    return dose({ ...rest, binding_share: percent / 100 });
+  return share === undefined ? undefined : dose({ ...rest, binding_allowance_percent: share * 100 });
+}
+
+function choice(reading: Reading, answer: DoseAnswer, turn: Turn): Outcome {
+  const { manner, number } = turn;
+  const additive = additiveOf(reading)?.id;
+  const vessel = vesselText(reading);
+  const inFull = additive !== undefined && !turn.cautioned.has(additive);
+  const ph = numberText(reading.fields.ph ?? 0, 2, manner.mark);
+  return {
+    answer,
+    inRound: [line('first', 'round-choice', { vessel, ph })],
+    lines: [
+      ...choiceLines(reading, vessel, answer, additive, manner),
+      ...conditionLines(reading, answer, manner),
+      ...factLines(reading, manner),
+      ...assumedLines(reading, manner),
+      ...warningLines(answer.warnings, manner, 'warning', SAID_BY_THE_CHOICE),
+      ...(additive === undefined ? [] : cautionLines(additive, inFull)),
+    ],
+    buttons: choiceButtons(number, answer.choices ?? [], manner),
+    ...(inFull && { cautioned: additive }),
+  };
+}
+
+function nothing(reading: Reading, answer: DoseAnswer, turn: Turn): Outcome {
+  const { manner, number } = turn;
+  const first = nothingLines(reading, answer, manner);
+  return {
+    answer,
+    inRound: first.slice(0, 1),
+    lines: [
+      ...first,
+      ...conditionLines(reading, answer, manner),
+      ...factLines(reading, manner),
+      ...assumedLines(reading, manner),
+      ...warningLines(answer.warnings, manner),
+    ],
+    buttons: doseButtons(number, {
+      stageAssumed: reading.assumed.stage !== undefined,
+      mayBeRed: false,
+      cautionsShort: false,
+    }),
+  };
+}

@@ -1,0 +1,69 @@
+import { effect } from '../../../core/dose/effect.ts';
+import type { EffectAnswer } from '../../../core/dose/answer.ts';
+import type { Reading } from '../../reader/understood.ts';
+import { buttonsFor } from '../buttons.ts';
+import { statedAmount } from '../lines/amount-text.ts';
+import { assumedLines } from '../lines/assumed.ts';
+import { cautionLines } from '../lines/cautions.ts';
+import { factLines } from '../lines/facts.ts';
+import { landingLine } from '../lines/landing.ts';
+import { line, listLine } from '../lines/line.ts';
+import { vesselText } from '../lines/vessel.ts';
+import { warningLines } from '../lines/warnings.ts';
+import { workingLines } from '../lines/working.ts';
+import { perLitre } from '../manner.ts';
+import type { Outcome, Turn } from '../outcome.ts';
+import { additiveOf, toEffectRequest } from '../to-requests.ts';
+import { massText } from '../../replies/quantity-text.ts';
+import { volumeText } from '../../replies/volume-text.ts';
+import type { Line } from '../../replies/reply.ts';
+import { missing } from './missing.ts';
+import { fermentStop } from './ferment-stop.ts';
+
+/** The answer to "what does this amount do": mg/L it adds, and where the wine lands. */
+export function answerEffect(reading: Reading, turn: Turn): Outcome {
+  const answer = effect(toEffectRequest(reading, turn.settings.basis));
+  if (reading.notes.some(({ id }) => id === 'ferment-stop')) return fermentStop(reading, answer, turn);
+  const additive = additiveOf(reading);
+  if (reading.asks.length > 0 || additive === undefined || answer.adds_mg_L === undefined)
+    return missing(reading, turn);
+  const { manner } = turn;
+  const inFull = !turn.cautioned.has(additive.id);
+  const first = firstOfEffect(reading, answer, turn);
+  const landing = landingLine(reading, answer, manner);
+  return {
+    answer,
+    inRound: first.slice(0, 1),
+    lines: [
+      ...first,
+      ...(reading.assumed.stage === undefined ? [] : [line('condition', 'condition-stage')]),
+      ...(landing ? [landing] : []),
+      ...factLines(reading, manner),
+      ...assumedLines(reading, manner),
+      ...workingLines(answer.steps, manner.mark),
+      ...warningLines(answer.warnings, manner),
+      ...cautionLines(additive.id, inFull),
+    ],
+    buttons: buttonsFor(turn.number, [...(inFull ? [] : (['s'] as const)), 'w', 'm']),
+    ...(inFull && { cautioned: additive.id }),
+  };
+}
+
+function firstOfEffect(reading: Reading, answer: EffectAnswer, { manner }: Turn): Line[] {
+  const { fields } = reading;
+  const additive = fields.additive ?? reading.assumed.additive ?? 'potassium-metabisulfite';
+  const values = { vessel: vesselText(reading), adds: perLitre(answer.adds_mg_L ?? 0, manner) };
+  const volume_L = fields.volume_L ?? reading.assumed.volume_L;
+  if (fields.rate_mg_L !== undefined) {
+    const rate = `${massText(fields.rate_mg_L / 10, manner.mark)}/hL`;
+    const first = line('first', 'adds-rate', { ...values, rate, additive });
+    if (answer.mass_g === undefined || volume_L === undefined) return [first];
+    const volume = volumeText(volume_L, manner.volumeUnit, manner.mark);
+    const amount = massText(answer.mass_g, manner.mark);
+    return [first, line('first', 'adds-rate-mass', { volume, amount })];
+  }
+  const amount = statedAmount(fields, additive, manner.mark);
+  return amount === undefined
+    ? listLine('first', 'adds-bare', [])
+    : [{ ...line('first', 'adds', values), list: [amount] }];
+}

@@ -1,0 +1,64 @@
+import type { DoseAnswer } from '../../../core/dose/answer.ts';
+import type { Reading } from '../../reader/understood.ts';
+import type { Line } from '../../replies/reply.ts';
+import { assumedLines } from '../lines/assumed.ts';
+import { factLines } from '../lines/facts.ts';
+import { line } from '../lines/line.ts';
+import { questionLine } from '../lines/question.ts';
+import { vesselText } from '../lines/vessel.ts';
+import { molecularPerLitre } from '../manner.ts';
+import type { Outcome, Turn } from '../outcome.ts';
+
+/**
+ * "No sulfite now" in fermenting and malolactic wine, and the question for a figure in must and base wine, where no
+ * target was stated; undefined where a dose may be given. Nothing waits for an answer.
+ */
+export function noDose(reading: Reading, answer: DoseAnswer, turn: Turn): Outcome | undefined {
+  const { stage } = reading.fields;
+  if (!reading.asks.includes('target') || stage === undefined) return undefined;
+  if (stage === 'fermenting' || stage === 'malolactic') return noSulfiteNow(reading, stage, answer, turn);
+  if (reading.asks[0] === 'target' && (stage === 'must' || stage === 'base'))
+    return askHowMuch(reading, answer, turn);
+  return undefined;
+}
+
+function echo(reading: Reading, turn: Turn): Line[] {
+  return [...factLines(reading, turn.manner), ...assumedLines(reading, turn.manner, false)];
+}
+
+function noSulfiteNow(
+  reading: Reading,
+  stage: 'fermenting' | 'malolactic',
+  answer: DoseAnswer,
+  turn: Turn,
+): Outcome {
+  const first = line('first', `no-dose-${stage}`, { vessel: vesselText(reading) });
+  const molecular =
+    answer.molecular_mg_L === undefined
+      ? []
+      : [
+          line('effect', 'no-dose-molecular', {
+            molecular: molecularPerLitre(answer.molecular_mg_L, turn.manner),
+          }),
+        ];
+  const why = line('effect', stage === 'fermenting' ? 'no-dose-why-fermenting' : 'no-dose-why');
+  return {
+    answer,
+    inRound: [first],
+    lines: [first, ...molecular, why, line('effect', 'no-dose-all-the-same'), ...echo(reading, turn)],
+    buttons: [],
+    askedTarget: true,
+  };
+}
+
+function askHowMuch(reading: Reading, answer: DoseAnswer, turn: Turn): Outcome {
+  const vessel = vesselText(reading);
+  const question = questionLine('target', reading, turn.settings, 'first');
+  return {
+    answer,
+    inRound: [line('first', 'round-target-stage', { vessel })],
+    lines: [question, ...echo(reading, turn)],
+    buttons: [],
+    askedTarget: true,
+  };
+}

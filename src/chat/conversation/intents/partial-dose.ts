@@ -1,0 +1,38 @@
+import type { DoseAnswer } from '../../../core/dose/answer.ts';
+import type { DoseRequest } from '../../../core/dose/request.ts';
+import type { Reading } from '../../reader/understood.ts';
+import type { Line } from '../../replies/reply.ts';
+import { assumedLines } from '../lines/assumed.ts';
+import { factLines } from '../lines/facts.ts';
+import { line } from '../lines/line.ts';
+import { knownSoFar } from '../lines/known-so-far.ts';
+import { vesselText } from '../lines/vessel.ts';
+import { warningLines } from '../lines/warnings.ts';
+import type { Outcome, Turn } from '../outcome.ts';
+import { asking } from './asking.ts';
+
+/** What can be said of an incomplete reading, and the one question for what is missing. */
+export function partialDose(reading: Reading, request: DoseRequest, answer: DoseAnswer, turn: Turn): Outcome {
+  const { manner } = turn;
+  const known = knownSoFar(reading, request, answer, manner);
+  const says = known.length > 0;
+  const condition: Line[] =
+    says && reading.assumed.stage !== undefined ? [line('condition', 'condition-stage')] : [];
+  const { question, buttons, waits } = asking(reading, turn, says ? 'question' : 'first');
+  return {
+    answer: says ? answer : null,
+    inRound: [
+      line('first', 'round-missing', { vessel: vesselText(reading), field: reading.asks[0] ?? 'none' }),
+    ],
+    lines: [
+      ...(says ? known : question),
+      ...condition,
+      ...(says ? question : []),
+      ...factLines(reading, manner),
+      ...assumedLines(reading, manner),
+      ...warningLines(answer.warnings, manner),
+    ],
+    buttons,
+    ...(waits !== undefined && { waits }),
+  };
+}

@@ -1,0 +1,15 @@
+import type { Reading } from '../../reader/understood.ts';
+import { line } from '../lines/line.ts';
+import { problemLines, shortened } from '../lines/problems.ts';
+import { vesselText } from '../lines/vessel.ts';
+import type { Outcome } from '../outcome.ts';
+
+/** A message with something wrong in it: what, and what to send instead; never a figure beside it. */
+export function answerProblem(reading: Reading): Outcome {
+  const lines = problemLines(reading, vesselText(reading));
+  const unread = reading.problems.find(({ code }) => code === 'not-understood');
+  const inRound = unread
+    ? [line('first', 'round-not-understood', { about: shortened(unread.about) })]
+    : lines.slice(0, 1);
+  return { answer: null, inRound, lines, buttons: [] };
+}

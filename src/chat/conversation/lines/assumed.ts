@@ -1,0 +1,38 @@
+import type { Reading } from '../../reader/understood.ts';
+import type { Line } from '../../replies/reply.ts';
+import { volumeText } from '../../replies/volume-text.ts';
+import type { Manner } from '../manner.ts';
+import { listLine, part } from './line.ts';
+import { noteParts } from './notes.ts';
+import { targetValues } from './target-text.ts';
+
+type Part = Omit<Line, 'room'>;
+
+/**
+ * What the bot filled in, how it read what could be read otherwise, and which figures it did not use. Without a dose
+ * (`weighs` false) no additive is spoken of.
+ */
+export function assumedLines(reading: Reading, manner: Manner, weighs = true): Line[] {
+  const set = reading.setAside.map((text) => part('set-aside-figure', { text }));
+  return [
+    ...listLine('assumed', 'assumed', [...filledIn(reading, manner, weighs), ...noteParts(reading, manner)]),
+    ...listLine('assumed', 'set-aside', set),
+  ];
+}
+
+function filledIn({ assumed, fields, asks }: Reading, manner: Manner, weighs: boolean): Part[] {
+  const parts: Part[] = [];
+  if (weighs && assumed.additive !== undefined && !asks.includes('additive'))
+    parts.push(part('assumed-additive', { additive: assumed.additive }));
+  if (assumed.target) parts.push(part(targetKey(fields), targetValues(assumed.target, manner)));
+  if (assumed.gallon) parts.push(part('assumed-gallon', { gallon: assumed.gallon }));
+  if (assumed.volume_L !== undefined && manner.volumeUnit !== 'barrel' && fields.vessels === undefined)
+    parts.push(part('assumed-volume', { volume: volumeText(assumed.volume_L, 'L', manner.mark) }));
+  else if (assumed.volume_L !== undefined) parts.push(part('assumed-barrels'));
+  return parts;
+}
+
+function targetKey(fields: Reading['fields']): string {
+  if (fields.category === 'sweet') return 'assumed-target-sweet';
+  return fields.style === 'red' ? 'assumed-target-red' : 'assumed-target';
+}

@@ -1,0 +1,37 @@
+import type { DoseAnswer, EffectAnswer } from '../../../core/dose/answer.ts';
+import type { Reading } from '../../reader/understood.ts';
+import { concentrationText, molecularText } from '../../replies/quantity-text.ts';
+import { numberText } from '../../replies/number-text.ts';
+import type { Line } from '../../replies/reply.ts';
+import type { Manner } from '../manner.ts';
+import { line } from './line.ts';
+
+type Landing = Pick<
+  DoseAnswer & EffectAnswer,
+  'free_after_mg_L' | 'free_expected_mg_L' | 'molecular_after_mg_L' | 'molecular_mg_L'
+>;
+
+/** Free SO2 in mg/L below which much or all of an addition may bind; core warns with a code of its own. */
+const LOW_FREE_mg_L = 10;
+
+/** Where the wine lands if nothing binds, and what to expect instead; never promised. */
+export function landingLine(reading: Reading, answer: Landing, manner: Manner): Line | undefined {
+  const { free_mg_L } = reading.fields;
+  const { free_after_mg_L, free_expected_mg_L } = answer;
+  if (free_mg_L === undefined || free_after_mg_L === undefined || free_expected_mg_L === undefined)
+    return undefined;
+  const values = {
+    now: numberText(free_mg_L, 1, manner.mark),
+    after: concentrationText(free_after_mg_L, manner.mark),
+    unit: manner.unit,
+    low: concentrationText(free_expected_mg_L[0], manner.mark),
+    high: concentrationText(free_expected_mg_L[1], manner.mark),
+  };
+  if (free_mg_L < LOW_FREE_mg_L) return line('effect', 'effect-land-low', values);
+  if (answer.molecular_after_mg_L === undefined) return line('effect', 'effect-land', values);
+  const molecular = molecularText(answer.molecular_after_mg_L, manner.mark);
+  if (answer.molecular_mg_L === undefined)
+    return line('effect', 'effect-land-to-molecular', { ...values, molecular });
+  const molecularNow = molecularText(answer.molecular_mg_L, manner.mark);
+  return line('effect', 'effect-land-molecular', { ...values, molecularNow, molecular });
+}

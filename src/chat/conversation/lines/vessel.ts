@@ -1,0 +1,28 @@
+import type { Reading } from '../../reader/understood.ts';
+
+/** More of a person's words than this would push the answer off its line. */
+const LONGEST = 24;
+
+/**
+ * The vessel as the person wrote it (`T4`, `barrel 17`), codes in capitals; `none` where none is named, which the
+ * sentences select on.
+ */
+export function vesselText(reading: Reading): string {
+  const { vessel, vessels } = reading.fields;
+  if (vessels !== undefined) return vesselsText(reading, vessels);
+  if (vessel === undefined) return 'none';
+  return asName(reading.where.vessel?.text ?? vessel, vessel);
+}
+
+function vesselsText(reading: Reading, vessels: readonly string[]): string {
+  const [first = 'none'] = vessels;
+  const last = vessels.at(-1) ?? first;
+  return asName(reading.where.vessels?.text ?? `${first}–${last}`, `${first}–${last}`);
+}
+
+function asName(written: string, otherwise: string): string {
+  const oneLine = written.replace(/[\p{C}\s]+/gu, ' ').trim();
+  const name = oneLine === '' || oneLine.length > LONGEST ? otherwise : oneLine;
+  if (!/[\p{L}]{4,}/u.test(name)) return name.toUpperCase();
+  return name.slice(0, 1).toUpperCase() + name.slice(1);
+}

@@ -1,0 +1,64 @@
+import type { Warning, WarningCode } from '../../../core/dose/answer.ts';
+import { numberText } from '../../replies/number-text.ts';
+import { concentrationText, molecularText } from '../../replies/quantity-text.ts';
+import type { Line } from '../../replies/reply.ts';
+import type { Manner } from '../manner.ts';
+import { line } from './line.ts';
+
+/** At most so many stand in a reply; the rest is behind `More`. */
+const MOST = 3;
+
+/** Said elsewhere in the reply, in a place of their own. */
+const SAID_ELSEWHERE: readonly WarningCode[] = [
+  'stage-assumed',
+  'style-unknown',
+  'no-addition-needed',
+  'gas-needs-training',
+  'allowance-covers-less',
+  'does-not-stop-fermentation',
+];
+
+/** No limit is spoken of unless it is passed or near. */
+const ONLY_BEHIND_MORE: readonly WarningCode[] = ['no-limit-on-file', 'limit-unconfirmed'];
+
+/** Whether free SO2 will be above half the limit, so that an unknown total is worth a word. */
+function totalMatters({ code, values }: Warning): boolean {
+  if (code !== 'total-unknown') return true;
+  const { free_after_mg_L: after, limit_mg_L: limit } = values;
+  return typeof after === 'number' && typeof limit === 'number' && after > limit / 2;
+}
+
+/** The weightiest warnings, at most three; `besides` are those whose matter stands in the reply already. */
+export function warningLines(
+  warnings: readonly Warning[],
+  manner: Manner,
+  room: Line['room'] = 'warning',
+  besides: readonly WarningCode[] = [],
+): Line[] {
+  return warnings
+    .filter(({ code }) => ![...SAID_ELSEWHERE, ...ONLY_BEHIND_MORE, ...besides].includes(code))
+    .filter(totalMatters)
+    .filter(({ values }) => values['measure_gives_mg_L'] === undefined) // the tablets' own line says so
+    .slice(0, MOST)
+    .map((warning) => warningLine(warning, manner, room));
+}
+
+/** All warnings that have no place of their own, for the button `More`. */
+export function allWarningLines(warnings: readonly Warning[], manner: Manner): Line[] {
+  return warnings
+    .filter(({ code }) => !SAID_ELSEWHERE.includes(code))
+    .map((warning) => warningLine(warning, manner, 'first'));
+}
+
+function warningLine({ code, values }: Warning, manner: Manner, room: Line['room']): Line {
+  const texts = Object.entries(values).map(([name, value]) => [name, textOf(name, value, manner)] as const);
+  return line(room, `warning-${code}`, { unit: manner.unit, ...Object.fromEntries<string>(texts) });
+}
+
+/** A warning's figure by its name: molecular SO2 to 0.01, concentrations to 1 or 0.1, the rest to 0.01. */
+function textOf(name: string, value: number | string, { mark }: Manner): string {
+  if (typeof value === 'string') return value;
+  if (name.includes('molecular')) return molecularText(value, mark);
+  if (name === 'rounding_mg_L') return concentrationText(Math.abs(value), mark);
+  return name.endsWith('_mg_L') ? concentrationText(value, mark) : numberText(value, 2, mark);
+}

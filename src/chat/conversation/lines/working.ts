@@ -1,0 +1,38 @@
+import { SOURCES } from '../../../core/sources.ts';
+import type { Step } from '../../../core/working.ts';
+import type { DecimalMark } from '../../replies/number-text.ts';
+import type { Line } from '../../replies/reply.ts';
+import { expressionText, resultText, shortExpression } from '../../replies/working-text.ts';
+import { line } from './line.ts';
+
+/** Lines of working that stand in a reply; the rest is behind the button. */
+const MOST_LINES = 5;
+
+/** Where a reading has more lines of working, these say the least and give way first. */
+const GIVE_WAY: readonly Step['name'][] = ['dissociation', 'molecular-now', 'molecular-after', 'free-after'];
+
+/** The three to five lines of the working that lead to the amount. */
+export function workingLines(steps: readonly Step[], mark: DecimalMark): Line[] {
+  let shown = steps;
+  for (const name of GIVE_WAY) if (shown.length > 4) shown = shown.filter((step) => step.name !== name);
+  return shown.slice(-MOST_LINES).map((step) => line('working', 'working', shortValues(step, mark)));
+}
+
+/** The whole working: each line with its name, its formula in words, the numbers put in, and the source. */
+export function wholeWorking(steps: readonly Step[], mark: DecimalMark): Line[] {
+  return steps.flatMap((step, at) => [
+    line('first', `step-${step.name}`),
+    line('first', 'working-symbol', { ...stepValues(step, mark), symbol: step.symbol }),
+    ...(step.source === undefined || step.source === steps[at - 1]?.source
+      ? []
+      : [line('first', 'working-source', { source: SOURCES[step.source].title })]),
+  ]);
+}
+
+function stepValues({ substituted, result }: Step, mark: DecimalMark): Record<string, string> {
+  return { substituted: expressionText(substituted, mark), result: resultText(result, mark) };
+}
+
+function shortValues(step: Step, mark: DecimalMark): Line['values'] {
+  return stepValues({ ...step, substituted: shortExpression(step.substituted, step.result.unit) }, mark);
+}

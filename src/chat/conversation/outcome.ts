@@ -1,0 +1,31 @@
+import type { AdditiveId } from '../../core/additives/additive-id.ts';
+import type { AskedField } from '../reader/understood.ts';
+import type { Button, Line } from '../replies/reply.ts';
+import type { Manner } from './manner.ts';
+import type { Answer } from './ports.ts';
+import type { Settings } from './settings.ts';
+
+/** What an intent has to know of the moment, beside the reading itself. */
+export interface Turn {
+  readonly settings: Settings;
+  readonly manner: Manner;
+  /** The number under which the reading is remembered: its buttons carry it. */
+  readonly number: number;
+  /** Additives whose cautions this person has had in full today. */
+  readonly cautioned: ReadonlySet<string>;
+}
+
+/** What an intent makes of a reading. */
+export interface Outcome {
+  readonly answer: Answer | null;
+  readonly lines: readonly Line[];
+  readonly buttons: readonly Button[];
+  /** The field whose question stands in the reply and waits for its answer. */
+  readonly waits?: AskedField;
+  /** Whether it asked for a target at a stage where nothing may wait. */
+  readonly askedTarget?: true;
+  /** The additive whose cautions the reply has in full. */
+  readonly cautioned?: AdditiveId;
+  /** What stands for the whole reply where the reading is one line of a round. */
+  readonly inRound: readonly Line[];
+}

@@ -1,0 +1,81 @@
+import { added } from '../../../core/dose/added.ts';
+import { dose } from '../../../core/dose/dose.ts';
+import { effect } from '../../../core/dose/effect.ts';
+import { solution } from '../../../core/dose/solution.ts';
+import type { Warning } from '../../../core/dose/answer.ts';
+import type { Step } from '../../../core/working.ts';
+import type { Reading } from '../../reader/understood.ts';
+import type { DecimalMark } from '../../replies/number-text.ts';
+import type { Button, Line } from '../../replies/reply.ts';
+import { buttonsFor } from '../buttons.ts';
+import { cautionLines } from '../lines/cautions.ts';
+import { line } from '../lines/line.ts';
+import { vesselText } from '../lines/vessel.ts';
+import { allWarningLines } from '../lines/warnings.ts';
+import { wholeWorking } from '../lines/working.ts';
+import { mannerOf } from '../manner.ts';
+import type { Remembered } from '../memory.ts';
+import type { Settings } from '../settings.ts';
+import {
+  additiveOf,
+  toAddedRequest,
+  toDoseRequest,
+  toEffectRequest,
+  toSolutionRequest,
+} from '../to-requests.ts';
+
+interface Reckoned {
+  readonly steps: readonly Step[];
+  readonly warnings: readonly Warning[];
+}
+
+/** The same reckoning once more: nothing of it was kept, as it always comes out alike. */
+function reckonAgain(reading: Reading, settings: Settings): Reckoned {
+  switch (reading.intent) {
+    case 'effect':
+      return effect(toEffectRequest(reading, settings.basis));
+    case 'added':
+      return { ...added(toAddedRequest(reading)), warnings: [] };
+    case 'solution': {
+      const request = toSolutionRequest(reading);
+      return request ? { ...solution(request), warnings: [] } : { steps: [], warnings: [] };
+    }
+    case 'dose':
+      return dose(toDoseRequest(reading, settings.basis));
+    case 'reading':
+    case 'titration':
+    case 'command':
+    case 'emergency':
+    case 'chat':
+      return { steps: [], warnings: [] };
+  }
+}
+
+/** The whole working of a remembered reading, line by line, with its sources. */
+export function workingOf(reading: Reading, mark: DecimalMark, settings: Settings): Line[] {
+  const { steps } = reckonAgain(reading, settings);
+  return [line('first', 'working-head', { vessel: vesselText(reading) }), ...wholeWorking(steps, mark)];
+}
+
+/** The cautions of a reading's additive in full. */
+export function safetyLines(reading: Reading): Line[] {
+  const additive = additiveOf(reading);
+  if (additive === undefined) return [line('first', 'old-button')];
+  return [line('first', 'safety-head', { additive: additive.id }), ...cautionLines(additive.id, true)];
+}
+
+/** All that stands behind `More`: every warning, and the buttons that had no room. */
+export function moreLines(
+  found: Remembered,
+  mark: DecimalMark,
+  settings: Settings,
+): { lines: Line[]; buttons: Button[] } {
+  const { reading, number } = found;
+  const manner = mannerOf(reading, mark, settings);
+  const warnings = allWarningLines(reckonAgain(reading, settings).warnings, manner);
+  const head = line('first', 'more-head', { vessel: vesselText(reading) });
+  return {
+    lines: [head, ...(warnings.length > 0 ? warnings : [line('first', 'more-no-warnings')])],
+    buttons: buttonsFor(number, reading.intent === 'dose' ? ['w', 's', 't'] : ['w', 's']),
+  };
+}

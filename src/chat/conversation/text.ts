@@ -1,0 +1,48 @@
+import { readMessage } from '../reader/read-message.ts';
+import type { Understood } from '../reader/understood.ts';
+import { answerRound } from './answer-round.ts';
+import { answerSingle } from './answer-single.ts';
+import { bareNumberAfterTarget } from './bare-number.ts';
+import { complete, completes } from './complete.ts';
+import type { Memory, Waiting } from './memory.ts';
+import type { Handled, IncomingMessage } from './ports.ts';
+import { handlePress } from './press.ts';
+import type { Settings } from './settings.ts';
+import { stillWaiting } from './waiting.ts';
+
+/** A text: a mark of a button, an answer to the question that waits, or a message of its own. */
+export function handleText(
+  message: IncomingMessage,
+  text: string,
+  memory: Memory,
+  settings: Settings,
+): Handled {
+  const waiting = stillWaiting(memory, message.at);
+  const mark = text.trim().toLowerCase();
+  const letter = waiting?.letters[mark];
+  if (waiting && letter) {
+    const reading = complete(waiting.reading, { fields: letter }, settings);
+    const understood: Understood = {
+      readings: [reading],
+      shared: {},
+      language: settings.language,
+      decimalMark: memory.decimalMark ?? '.',
+    };
+    return answerSingle(message, understood, memory, settings);
+  }
+  const asked = bareNumberAfterTarget(message, mark, memory, settings);
+  if (asked) return asked;
+  const button = /^\d{1,2}$/.test(mark) ? memory.lastButtons[Number(mark) - 1] : undefined;
+  if (!waiting && button !== undefined) return handlePress(message, button, memory, settings);
+  const understood = readMessage(text, settings, waiting);
+  return understood.readings.length === 1
+    ? answerSingle(message, completed(understood, waiting, settings), memory, settings)
+    : answerRound(message, understood, memory, settings);
+}
+
+/** The message with its one reading completed by the one that waits, where it completes it. */
+function completed(understood: Understood, waiting: Waiting | undefined, settings: Settings): Understood {
+  const [next] = understood.readings;
+  if (!waiting || !next || next.problems.length > 0 || !completes(waiting.reading, next)) return understood;
+  return { ...understood, readings: [complete(waiting.reading, next, settings)] };
+}

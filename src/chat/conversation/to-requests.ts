@@ -1,0 +1,132 @@
+import type { AdditiveAtHand } from '../../core/additives/additive-id.ts';
+import type {
+  AddedRequest,
+  DoseRequest,
+  EffectRequest,
+  SolutionRequest,
+  StatedAmount,
+  WineFacts,
+} from '../../core/dose/request.ts';
+import { litresTo } from '../../core/units/volume.ts';
+import type { Basis } from '../../core/wine.ts';
+import type { AskedField, Fields, Reading } from '../reader/understood.ts';
+
+/** While one of these is asked, the additive is not settled and no amount of it may be given. */
+const SETTLES_ADDITIVE: readonly AskedField[] = [
+  'additive',
+  'strength_percent',
+  'tablet_salt_g',
+  'tablet_SO2_g',
+];
+
+/** `{ [key]: value }` for those of the keys that are there: a request never carries an undefined key. */
+function pick<K extends keyof Fields>(fields: Fields, keys: readonly K[]): Pick<Fields, K> {
+  return Object.fromEntries(
+    keys.flatMap((key) => (fields[key] === undefined ? [] : [[key, fields[key]]])),
+  ) as Pick<Fields, K>;
+}
+
+/**
+ * The additive of a reading as it stands in the cellar, said or assumed; undefined while its name, strength or
+ * size is still asked.
+ */
+export function additiveOf(reading: Reading): AdditiveAtHand | undefined {
+  const id = reading.fields.additive ?? reading.assumed.additive;
+  if (id === undefined || reading.asks.some((field) => SETTLES_ADDITIVE.includes(field))) return undefined;
+  return {
+    id,
+    ...pick(reading.fields, ['strength_percent', 'tablet_SO2_g', 'tablet_salt_g']),
+    ...(reading.strength_of && { strength_of: reading.strength_of }),
+  };
+}
+
+/** How many equal vessels or barrels the volume is the sum of; undefined for one. */
+export function countOf(reading: Reading): number | undefined {
+  const count = reading.fields.vessels?.length ?? reading.containers ?? 1;
+  return count > 1 ? count : undefined;
+}
+
+/** The volume in litres, and as it was written, so that the working shows the person's own figure. */
+function volumeOf({
+  fields,
+  assumed,
+  volumeUnit,
+}: Reading): Pick<DoseRequest, 'volume_L' | 'volume_display'> {
+  const volume_L = fields.volume_L ?? assumed.volume_L;
+  if (volume_L === undefined) return {};
+  if (volumeUnit === undefined || volumeUnit === 'barrel') return { volume_L };
+  const value = Number(litresTo(volume_L, volumeUnit).toPrecision(12));
+  return { volume_L, volume_display: { value, unit: volumeUnit } };
+}
+
+function wineOf({ fields }: Reading): WineFacts {
+  return pick(fields, [
+    'ph',
+    'free_mg_L',
+    'total_mg_L',
+    'temperature_C',
+    'alcohol_percent',
+    'sugar_g_L',
+    'style',
+    'category',
+    'product',
+  ]);
+}
+
+function amountOf({ fields }: Reading): StatedAmount {
+  return pick(fields, ['mass_g', 'additive_volume_mL', 'tablets', 'rate_mg_L', 'added_mg_L']);
+}
+
+function stageOf({ fields, assumed }: Reading): Pick<DoseRequest, 'stage' | 'stageStated'> {
+  return { stage: fields.stage ?? assumed.stage ?? 'finished', stageStated: fields.stage !== undefined };
+}
+
+function optionalAdditive(reading: Reading): { additive?: AdditiveAtHand } {
+  const additive = additiveOf(reading);
+  return additive === undefined ? {} : { additive };
+}
+
+/** The question for a dose that a reading asks. Assumptions count as facts; what is asked stays out. */
+export function toDoseRequest(reading: Reading, basis: Basis): DoseRequest {
+  const count = countOf(reading);
+  const target = reading.asks.includes('target')
+    ? undefined
+    : (reading.fields.target ?? reading.assumed.target);
+  return {
+    ...wineOf(reading),
+    ...volumeOf(reading),
+    ...(count !== undefined && { vessels: count }),
+    ...optionalAdditive(reading),
+    ...(target !== undefined && { target }),
+    targetStated: reading.fields.target !== undefined,
+    ...stageOf(reading),
+    ...pick(reading.fields, ['binding_allowance_percent', 'binding_share']),
+    basis,
+  };
+}
+
+/** The question for what an amount does. */
+export function toEffectRequest(reading: Reading, basis: Basis): EffectRequest {
+  return {
+    ...wineOf(reading),
+    ...amountOf(reading),
+    ...volumeOf(reading),
+    ...optionalAdditive(reading),
+    ...stageOf(reading),
+    toStopFermentation: reading.notes.some(({ id }) => id === 'ferment-stop'),
+    basis,
+  };
+}
+
+/** The addition that was made. */
+export function toAddedRequest(reading: Reading): AddedRequest {
+  return { ...amountOf(reading), ...volumeOf(reading), ...optionalAdditive(reading) };
+}
+
+/** The stock that is to be made up; undefined while its volume or its salt is asked. */
+export function toSolutionRequest(reading: Reading): SolutionRequest | undefined {
+  const additive = additiveOf(reading);
+  const { volume_L, ...shown } = volumeOf(reading);
+  if (additive === undefined || volume_L === undefined) return undefined;
+  return { volume_L, ...shown, additive, ...pick(reading.fields, ['mass_g', 'additive_volume_mL']) };
+}

@@ -1,0 +1,77 @@
+import { FluentBundle, FluentResource } from '@fluent/bundle';
+import type { Language } from '../reader/understood.ts';
+import { withCapital } from './capital.ts';
+import { fold } from './fold.ts';
+import type { Line, Reply } from './reply.ts';
+
+/** What a person gets: the text, and the buttons with their labels. */
+export interface Said {
+  readonly text: string;
+  readonly buttons: readonly { readonly key: string; readonly mark: string; readonly label: string }[];
+}
+
+/** Makes the text of a reply. */
+export type Say = (reply: Reply) => Said;
+
+/** The Fluent text of each language; `en` is whole and stands in for what another has not yet. */
+export type LocaleSources = Readonly<Partial<Record<Language, string>>> & { readonly en: string };
+
+type Sentence = Pick<Line, 'key' | 'values' | 'list'>;
+
+function bundleOf(language: Language, source: string): FluentBundle {
+  const bundle = new FluentBundle(language, { useIsolating: false });
+  const [fault] = bundle.addResource(new FluentResource(source));
+  if (fault) throw new TypeError(`Cannot read the sentences of ${language}: ${fault.message}`);
+  return bundle;
+}
+
+function format(bundles: readonly FluentBundle[], { key, values, list }: Sentence): string {
+  const bundle = bundles.find((one) => one.getMessage(key)?.value);
+  const pattern = bundle?.getMessage(key)?.value;
+  if (!bundle || !pattern) throw new TypeError(`Cannot say "${key}" as no language has that sentence`);
+  const args = list ? { ...values, list: joined(bundles, key, list) } : values;
+  const faults: Error[] = [];
+  const text = bundle.formatPattern(pattern, args, faults);
+  if (faults.length > 0) throw new TypeError(`Cannot say "${key}": ${faults[0]?.message}`);
+  return text;
+}
+
+/** The parts of a list, with the separator of that sentence or the usual one between them. */
+function joined(bundles: readonly FluentBundle[], key: string, list: readonly Sentence[]): string {
+  const own = `${key}-separator`;
+  const separator = bundles.some((one) => one.hasMessage(own)) ? own : 'list-separator';
+  return list.map((one) => format(bundles, one)).join(format(bundles, { key: separator, values: {} }));
+}
+
+/**
+ * Makes `say` from the text of the locale files, once. Throws a TypeError for a sentence that is missing, or that
+ * takes a variable nobody handed in: half a sentence about a dose is worse than none.
+ *
+ * @example
+ * ```ts
+ * makeSay({ en: 'hi = Hello { $who }' })({ language: 'en', buttons: [], lines: [{ room: 'first', key: 'hi', values: { who: 'T4' } }] }).text // => "Hello T4"
+ * ```
+ */
+export function makeSay(sources: LocaleSources): Say {
+  const bundles = new Map<Language, FluentBundle>();
+  for (const [language, source] of Object.entries(sources))
+    bundles.set(language as Language, bundleOf(language as Language, source));
+  const chain = (language: Language): FluentBundle[] =>
+    [bundles.get(language), bundles.get('en')].filter((one) => one !== undefined);
+  return (reply) => {
+    const sayLine = (line: Line): string => withCapital(format(chain(line.language ?? reply.language), line));
+    const labelOf = (button: Reply['buttons'][number]): string =>
+      format(chain(reply.language), { key: button.label, values: button.values });
+    return {
+      text: fold(
+        reply.lines.map((line) => ({ line, text: sayLine(line) })),
+        () => format(chain(reply.language), { key: 'folded', values: {} }),
+      ),
+      buttons: reply.buttons.map((button) => ({
+        key: button.key,
+        mark: button.mark,
+        label: labelOf(button),
+      })),
+    };
+  };
+}

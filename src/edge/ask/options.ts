@@ -1,0 +1,85 @@
+import { parseArgs } from 'node:util';
+import { ADDITIVES } from '../../core/additives/additives.ts';
+import type { AdditiveId } from '../../core/additives/additive-id.ts';
+import { DEFAULT_SETTINGS, withUnits, type Settings } from '../../chat/conversation/settings.ts';
+import { OperatorError } from '../operator-error.ts';
+import { isLanguage, LANGUAGES } from '../languages.ts';
+
+/** What the command line asks for. */
+export interface AskOptions {
+  readonly jsonl: boolean;
+  /** The message, where it stands on the command line. */
+  readonly text: string;
+  readonly settings: Settings;
+  /** Options that are accepted, but that this version does nothing with. */
+  readonly notServedYet: readonly string[];
+}
+
+const USAGE = `npm run -s ask -- "T4 1450 gal pH 3.58 free 21"
+npm run -s ask -- --jsonl < messages.jsonl
+options: --language ${LANGUAGES.join('|')}  --basis pk-1.81|oiv  --additive NAME  --units metric|us|imperial`;
+
+const NOT_SERVED_YET = ['region', 'data', 'log', 'vessels'] as const;
+const UNITS = ['metric', 'us', 'imperial'] as const;
+const BASES = ['pk-1.81', 'oiv'] as const;
+
+/** An additive that is usual needs neither strength nor size to be told with every message. */
+const USUAL: readonly string[] = Object.values(ADDITIVES)
+  .filter(({ kind }) => kind === 'powder' || kind === 'gas')
+  .map(({ id }) => id);
+
+function oneOf<T extends string>(name: string, value: string | undefined, all: readonly T[]): T | undefined {
+  if (value === undefined) return undefined;
+  const found = all.find((one) => one === value);
+  if (found === undefined) throw new OperatorError(`--${name} must be one of ${all.join(', ')}.`);
+  return found;
+}
+
+function parse(args: readonly string[]) {
+  try {
+    return parseArgs({
+      args: [...args],
+      allowPositionals: true,
+      options: {
+        jsonl: { type: 'boolean' },
+        language: { type: 'string' },
+        basis: { type: 'string' },
+        additive: { type: 'string' },
+        units: { type: 'string' },
+        region: { type: 'string' },
+        data: { type: 'string' },
+        log: { type: 'boolean' },
+        vessels: { type: 'boolean' },
+      },
+    });
+  } catch (error) {
+    const reason = error instanceof Error ? error.message.split('. ')[0] : String(error);
+    throw new OperatorError(`${reason}.\n${USAGE}`, { cause: error });
+  }
+}
+
+/**
+ * Reads the command line.
+ *
+ * @throws OperatorError with a sentence for an option that there is not, or a value that it cannot have.
+ */
+export function readOptions(args: readonly string[]): AskOptions {
+  const { values, positionals } = parse(args);
+  const text = positionals.join(' ');
+  const notServedYet = NOT_SERVED_YET.filter((name) => values[name] !== undefined).map((name) => `--${name}`);
+  const jsonl = values.jsonl ?? false;
+  if (jsonl === (text.trim() !== '') && !(values.log ?? values.vessels))
+    throw new OperatorError(`One message, or --jsonl and messages on stdin.\n${USAGE}`);
+  if (values.language !== undefined && !isLanguage(values.language))
+    throw new OperatorError(`--language must be one of ${LANGUAGES.join(', ')}.`);
+  const basis = oneOf('basis', values.basis, BASES);
+  const additive = oneOf('additive', values.additive, USUAL as readonly AdditiveId[]);
+  const units = oneOf('units', values.units, UNITS);
+  const settings: Settings = {
+    ...withUnits(DEFAULT_SETTINGS, units ?? 'metric'),
+    ...(values.language !== undefined && { language: values.language }),
+    ...(basis !== undefined && { basis }),
+    ...(additive !== undefined && { usualAdditive: additive }),
+  };
+  return { jsonl, text, settings, notServedYet };
+}
