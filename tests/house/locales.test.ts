@@ -32,10 +32,10 @@ function unusedKeys(files: readonly SourceFile[], ftl: string): string[] {
 
 /** Values that stand written out beside a key and are not the ones its sentence takes. */
 function wrongValues(files: readonly SourceFile[], known: LocaleMessages): string[] {
-  return files.flatMap(usedKeys).flatMap(({ place, key, shown, values }) => {
+  return files.flatMap(usedKeys).flatMap(({ place, key, shown, values, whole }) => {
     const takers = [...known].filter(([one]) => key.test(one)).map(([, taken]) => taken);
     if (values === undefined || takers.length === 0) return [];
-    const lacking = takers.flatMap((taken) => taken.filter((one) => !values.includes(one)));
+    const lacking = (whole ? takers : []).flatMap((taken) => taken.filter((one) => !values.includes(one)));
     const idle = values.filter((one) => !takers.some((taken) => taken.includes(one)));
     return [
       ...lacking.map((one) => `${place} ${shown} lacks $${one}`),
@@ -91,6 +91,9 @@ describe('the rules find what is planted', () => {
     ["line('first', 'greeting', { ...all })", 0],
     ["line('first', 'greeting', { name: 'x' })", 0],
     ["line('first', 'step-a', { name: 'x' })", 1],
+    ["const x = { ...line('first', 'greeting'), list: [] }", 0],
+    ["const x = { key: 'step-a', values: { name: 'x' } }", 1],
+    ["line('first', `step-${x}`, { age: 'x' })", 1],
   ])('%s: %i wrong values', (text, times) => {
     expect(find(wrongValues, text)).toHaveLength(times);
   });

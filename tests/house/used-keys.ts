@@ -9,6 +9,8 @@ export interface UsedKey {
   readonly key: RegExp;
   readonly shown: string;
   readonly values?: readonly string[];
+  /** Whether these are all the values it will get: not where code adds to them, or where the key is put together. */
+  readonly whole: boolean;
 }
 
 /** Functions that take a key, and which of their arguments it is; values and lists follow it. */
@@ -17,18 +19,34 @@ const TAKERS: Readonly<Record<string, number>> = { line: 1, listLine: 1, part: 0
 /** Every place of a file where a key of a sentence is written, wholly or as a template. */
 export function usedKeys(file: SourceFile): UsedKey[] {
   const found: UsedKey[] = [];
-  const add = (node: ESTree.Node | undefined, values: readonly string[] | undefined): void => {
-    for (const { pattern, shown } of node === undefined ? [] : patternsIn(node, file.text))
-      found.push({ place: placeOf(file, node?.start ?? 0), key: pattern, shown, ...(values && { values }) });
+  const addedTo = new Set<ESTree.Node>();
+  const add = (
+    node: ESTree.Node | undefined,
+    values: readonly string[] | undefined,
+    whole: boolean,
+  ): void => {
+    if (node === undefined) return;
+    for (const { pattern, shown } of patternsIn(node, file.text)) {
+      const place = placeOf(file, node.start);
+      found.push({
+        place,
+        key: pattern,
+        shown,
+        whole: whole && !shown.includes('${'),
+        ...(values && { values }),
+      });
+    }
   };
   new Visitor({
+    SpreadElement: (node) => void addedTo.add(node.argument),
+    MemberExpression: (node) => void addedTo.add(node.object),
     CallExpression(node) {
       const callee = node.callee.type === 'Identifier' ? node.callee.name : '';
       const at = TAKERS[callee];
       if (at === undefined) return;
       const given = node.arguments[at + 1];
-      const list = callee === 'listLine';
-      add(node.arguments[at], given === undefined ? (list ? ['list'] : []) : list ? ['list'] : keysOf(given));
+      const values = callee === 'listLine' ? ['list'] : given === undefined ? [] : keysOf(given);
+      add(node.arguments[at], values, !addedTo.has(node));
     },
     ObjectExpression(node) {
       const member = (name: string): ESTree.Node | undefined =>
@@ -36,8 +54,7 @@ export function usedKeys(file: SourceFile): UsedKey[] {
           one.type === 'Property' && nameOf(one) === name ? [one.value] : [],
         )[0];
       const values = member('values');
-      if (values === undefined) return;
-      add(member('label') ?? member('key'), member('list') === undefined ? keysOf(values) : undefined);
+      if (values !== undefined) add(member('label') ?? member('key'), keysOf(values), false);
     },
   }).visit(file.program);
   return found;
