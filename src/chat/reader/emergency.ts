@@ -46,9 +46,11 @@ const has = (hits: Hits, id: DangerId): boolean => hits.has(id);
 
 /** Whether what fell or cannot breathe is a thing named up to three words before: `foam collapsed`. */
 function isThing(hits: Hits, words: readonly string[], { from }: Hit): boolean {
-  const before = (id: DangerId): boolean => all(hits, id).some((hit) => hit.to < from && from - hit.to <= 3);
-  const vessel = words.slice(Math.max(0, from - 3), from).some((word) => /^(t|fv|b)?\d+$/.test(word));
-  return (before('thing') || vessel) && !before('person');
+  const isBeside = (at: number): boolean => all(hits, 'beside').some((hit) => hit.from < at && at - hit.from <= 2);
+  const near = (at: number): boolean => at < from && from - at <= 3 && !isBeside(at);
+  const person = all(hits, 'person').some((hit) => hit.to < from && from - hit.to <= 3);
+  const vessel = words.some((word, at) => near(at) && /^(t|fv|b)?\d+$/.test(word));
+  return (vessel || all(hits, 'thing').some((hit) => near(hit.from))) && !person;
 }
 
 /** A gas and a leak within four words; free and total SO2 are no gas. */
@@ -56,6 +58,10 @@ function isGasLeak(hits: Hits, words: readonly string[]): boolean {
   const gases = all(hits, 'gas').filter(({ from }) => !['free', 'total', 'libre', 'livre', 'libera', 'mol', 'molecular'].includes(words[from - 1] ?? ''));
   return gases.some((gas) => all(hits, 'leak').some((leak) => Math.abs(leak.from - gas.from) <= 5));
 }
+
+/** `he dropped a hose, it fell into the tank`: a thing stands between the person and the fall. */
+const isDropped = (hits: Hits): boolean =>
+  all(hits, 'fell').every((fall) => all(hits, 'thing').some((thing) => thing.to < fall.from && all(hits, 'person').every((person) => person.to < thing.from || person.from > fall.to)));
 
 function isDanger(hits: Hits, words: readonly string[]): boolean {
   const person = (['down', 'breathless'] as const).some((id) => all(hits, id).some((hit) => !isThing(hits, words, hit)));
@@ -67,6 +73,7 @@ function isDanger(hits: Hits, words: readonly string[]): boolean {
   if (has(hits, 'alarm') && !has(hits, 'elsewhere')) return true;
   const vessel = has(hits, 'vessel') || words.some((word) => /^(t|fv)\d{1,3}$/.test(word));
   const inside = all(hits, 'went-in').some((hit) => !isThing(hits, words, hit));
+  if (has(hits, 'fell') && has(hits, 'person') && vessel && !isDropped(hits)) return true;
   if (!has(hits, 'silent')) return false;
   return (inside && (has(hits, 'person') || !has(hits, 'elsewhere'))) || (has(hits, 'person') && vessel && !has(hits, 'elsewhere'));
 }

@@ -52,6 +52,10 @@ function isClaimedBefore(terms: readonly Term[], i: number): boolean {
   return k >= 0 && has(terms[k], CLAIMS_NEXT);
 }
 
+/** `T8 900 gal`: the 8 is the vessel's, or the label's that it is glued to. */
+const isGluedToWord = (terms: readonly Term[], i: number): boolean =>
+  terms[i]!.gap === false && (terms[i - 1]?.kind === 'word' || (terms[i - 1]?.text === '-' && terms[i - 1]!.gap === false)) || terms[i - 1]?.text === '/';
+
 const unitFollows = (terms: readonly Term[], i: number): boolean =>
   has(terms[i], /^unit:(L|hL|m3|gal|galUS|galUK|mL|g|kg|lb)$/) || has(terms[i], /^cue:thousand$/);
 
@@ -73,7 +77,7 @@ function joinBlankGroups(terms: readonly Term[]): Term[] {
     if (isWhole(first) && first.text.length <= 3 && !first.text.startsWith('0')) {
       while (terms[last + 1]?.kind === 'number' && terms[last + 1]!.gap && /^\d{3}([.,]\d{1,2})?$/.test(terms[last + 1]!.text)) last++;
     }
-    if (last === i || !unitFollows(terms, last + 1) || isClaimedBefore(terms, i - 1)) {
+    if (last === i || !unitFollows(terms, last + 1) || isClaimedBefore(terms, i - 1) || isGluedToWord(terms, i)) {
       out.push(first);
       continue;
     }

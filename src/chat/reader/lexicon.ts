@@ -55,7 +55,7 @@ export function buildLexicon(lists: readonly Words[]): Lexicon {
       const same = formulas.get(phrase[0] ?? '') ?? [];
       formulas.set(phrase[0] ?? '', [...same, phrase].toSorted((a, b) => b.length - a.length));
     }
-    if (/^[a-z]{5,}$/.test(phrase) && tags.some((tag) => MENDABLE.test(tag))) {
+    if (/^[a-z]{4,}$/.test(phrase) && tags.some((tag) => MENDABLE.test(tag))) {
       mendable.set(phrase[0] ?? '', [...(mendable.get(phrase[0] ?? '') ?? []), phrase]);
     }
   }

@@ -71,12 +71,14 @@ function shareVolume(board: Board, fields: Record<string, unknown>): void {
       board.marks.barrelsAssumed_L = vessels.length * USUAL_BARREL_L;
       board.marks.barrelsCounted = true;
     }
-  } else if (board.marks.statedEach || holdsCue(board, 'each') || (isBarrels && volume <= 700 && !holdsCue(board, 'altogether'))) {
+  } else if (!board.marks.statedTotal && (board.marks.statedEach || holdsCue(board, 'each') || (isBarrels && volume <= 700 && !holdsCue(board, 'altogether')))) {
     fields['volume_L'] = volume * vessels.length;
     board.notes.push({ id: 'each-or-total', text: `${volume} L` });
-  } else if (!holdsCue(board, 'altogether')) {
+  } else if (!board.marks.statedTotal && !holdsCue(board, 'altogether')) {
     delete fields['volume_L'];
     board.marks.eachOrTotal = true;
+    const { from, to } = findingOf(board, 'volume_L')!;
+    board.problems.push({ code: 'ambiguous-number', about: placeOf(board, from, to).text });
     board.notes.push({ id: 'each-or-total', text: '' });
   }
 }
@@ -120,7 +122,6 @@ export function readDraft(board: Board): Draft {
   assumeBarrel(board);
   const intent = decideIntent(board);
   const fields = fieldsOf(board);
-  if (intent === 'chat') return { intent, fields: {}, problems: [], setAside: [], notes: board.notes.filter(({ id }) => id === 'negated'), marks: {}, where: {} };
   if (intent === 'dose' && isFound(board, 'mass_g')) board.notes.push({ id: 'mass-beside-readings', text: '' });
   if (board.marks.fruitByWeight) board.notes.push({ id: 'fruit-by-weight', text: '' });
   const { strengthAsSalt, volumeUnit, containers, concentrationUnit } = board.marks;

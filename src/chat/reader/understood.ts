@@ -125,6 +125,8 @@ export interface Marks {
   pastLine?: true;
   /** `each` stood beside the volume of several vessels. */
   statedEach?: true;
+  /** `total`, `in all` stood beside it. */
+  statedTotal?: true;
   /** One volume beside several vessels: of each or in all? */
   eachOrTotal?: true;
 }

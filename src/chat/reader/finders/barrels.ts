@@ -42,8 +42,8 @@ function sizeAt(board: Board, i: number, bare: boolean): { litres: number; to: n
 /** `40 x 225 L`, `6 x 60 gal barrels`, `6 barrels of 228`, `6 barrels (228 L)`, `6 225 L barrels`. */
 function findCounted(board: Board, i: number): boolean {
   const { value: count, from } = figureAt(board, i);
-  if (count < 0 || !Number.isFinite(count)) return false;
-  const named = isBarrel(board, i + 1) || hasTag(board, i + 1, 'vessel:cask') || hasTag(board, i + 1, 'vessel:other');
+  if (count < 0 || !Number.isInteger(count)) return false;
+  const named = board.taken[i + 1] === true ? false : isBarrel(board, i + 1) || hasTag(board, i + 1, 'vessel:cask') || hasTag(board, i + 1, 'vessel:other');
   const times = isTimes(board, i + 1);
   if (times) {
     const size = sizeAt(board, i + 2, true);

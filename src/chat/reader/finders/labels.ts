@@ -63,7 +63,8 @@ const hasForeignUnit = (board: Board, at: number): boolean =>
 function fits(label: LabelId, { value }: Figure): boolean {
   if (label === 'ph') return value >= 2.5 && value <= 4.8;
   if (label === 'alcohol') return value >= 0 && value <= 25;
-  return label !== 'free' || value < 400;
+  const isPhLike = value >= 2.7 && value <= 4.5 && !Number.isInteger(value);
+  return !isPhLike && (label !== 'free' || value < 400);
 }
 
 /** Figures and labels in turn, with nothing between: `18 free 60 total 3.5 pH`. */

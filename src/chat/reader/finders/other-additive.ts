@@ -39,7 +39,8 @@ export function findOtherAdditive(board: Board): void {
   if (named) return;
   const anywhere = board.terms.findIndex((_, i) => isNone(i));
   if (anywhere < 0) return;
-  const wanted = amount !== undefined || board.pastTense || holdsCue(board, 'how-much') || holdsCue(board, 'add') || board.marks.spoon === true;
+  const counted = board.terms[anywhere - 1]?.kind === 'number';
+  const wanted = counted || amount !== undefined || board.pastTense || holdsCue(board, 'how-much') || holdsCue(board, 'add') || board.marks.spoon === true;
   const isFigure = isFound(board, 'ph') || isFound(board, 'free_mg_L');
   if (wanted && !(isFigure && amount === undefined && !board.pastTense)) refuseWord(board, anywhere);
 }

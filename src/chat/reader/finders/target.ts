@@ -1,6 +1,7 @@
 import type { Target } from '../../../core/wine.ts';
 import type { Board } from '../board.ts';
-import { decimalAt, find, hasTag, isCue, isFound, isFree, isMark, refuse } from '../board.ts';
+import { decimalAt, find, hasTag, holdsCue, isCue, isFound, isFree, isMark, refuse } from '../board.ts';
+import { isCellarTalk } from '../refine/unlabelled.ts';
 import { MASS_UNITS, VOLUME_UNITS, concentrationAt, mg_L_IN, unitAt } from '../units.ts';
 
 /** A bare target up to this is molecular, above it free, in mg/L. */
@@ -153,12 +154,15 @@ function findVerb(board: Board, i: number): void {
     if (more) return keepAddition(board, { ...aim, to: aim.to + 1 }, i);
     return isPlain || label === undefined && aim.kind === undefined ? refuse(board, 'ambiguous-number', i, aim.to) : keepTarget(board, aim, i, label);
   }
-  if (isCue(board, i, 'add') || isCue(board, i, 'raise')) return keepAddition(board, aim, i);
+  if (isCue(board, i, 'add') || isCue(board, i, 'raise') || isCue(board, i, 'by')) return keepAddition(board, aim, i);
+  const isPlainTo = aim.kind === undefined && label === undefined && !concentrationAt(board, aim.from + 1);
+  if (isPlainTo && !isCellarTalk(board)) return;
   if (isCue(board, i, 'to')) keepTarget(board, aim, i, label);
 }
 
 const isVerb = (board: Board, i: number): boolean =>
-  isArrow(board, i) || (['target', 'add', 'raise', 'need', 'to'] as const).some((cue) => isCue(board, i, cue));
+  isArrow(board, i) ||
+  (isCue(board, i, 'by') && holdsCue(board, 'raise')) || (['target', 'add', 'raise', 'need', 'to'] as const).some((cue) => isCue(board, i, cue));
 
 /** Finds what is aimed at: a level of free or molecular SO2, or a stated addition. */
 export function findTarget(board: Board): void {

@@ -88,7 +88,8 @@ function coded(board: Board, i: number): Named | undefined {
 function rangeEnd(board: Board, first: Named): { number: number; to: number } | undefined {
   const k = first.to + 1;
   const joins = isMark(board, k, '-') || isCue(board, k, 'to') || isCue(board, k, 'joined') || (isMark(board, k, '.') && isMark(board, k + 1, '.'));
-  if (!joins || first.number === undefined) return undefined;
+  const isMinus = isMark(board, k, '-') && board.terms[k]!.gap && board.terms[k + 1]?.gap === false;
+  if (!joins || isMinus || first.number === undefined) return undefined;
   const at = isMark(board, k, '.') ? k + 2 : k + 1;
   const second = worded(board, at) ?? (board.terms[at]?.kind === 'word' ? coded(board, at) : undefined);
   if (second?.number !== undefined && second.kind === first.kind) return { number: second.number, to: second.to };

@@ -1,5 +1,5 @@
 import type { Board, Figure } from '../board.ts';
-import { figureAt, find, findingOf, isCue, isFree, isMark, refuse } from '../board.ts';
+import { figureAt, find, findingOf, hasTag, isCue, isFree, isMark, refuse, setAside } from '../board.ts';
 import { litresOf, noteUnit } from './barrels.ts';
 import type { UnitAt } from '../units.ts';
 import { VOLUME_UNITS, unitAt } from '../units.ts';
@@ -46,6 +46,10 @@ const isRange = (board: Board, i: number): boolean =>
   isFree(board, i - 2) &&
   !(isMark(board, i - 1, '-') && board.terms[i - 1]!.gap);
 
+/** `60 hl/h` is a flow and no volume. */
+const isFlow = (board: Board, i: number): boolean =>
+  (isMark(board, i, '/') || isCue(board, i, 'per')) && hasTag(board, i + 1, 'unit:none-of-ours');
+
 /** A volume of mL or a few litres that belongs to an additive, not to the wine. */
 function findVolumeAt(board: Board, i: number): number {
   const volume = volumeAt(board, i);
@@ -61,6 +65,10 @@ function findVolumeAt(board: Board, i: number): number {
   const start = sumStart(board, i);
   const litres = start < i ? sumOf(board, start, i) * litresOf(board, volume.unit.id) : volume.litres;
   const bracket = bracketEnd(board, volume.unit.to + 1);
+  if (isFlow(board, volume.unit.to + 1)) {
+    setAside(board, i, volume.unit.to + 2);
+    return volume.unit.to + 2;
+  }
   noteUnit(board, volume.unit.id);
   if (litres <= 0) {
     refuse(board, 'volume-not-positive', volume.figure.from, volume.unit.to);
@@ -71,6 +79,7 @@ function findVolumeAt(board: Board, i: number): number {
   find(board, 'volume_L', litres, 'unit', start < i ? start : volume.figure.from, to);
   if (start < i) board.notes.push({ id: 'volume-sum', text: board.message.slice(board.folded.at[board.terms[start]!.start], board.folded.at[board.terms[to]!.end]) });
   if (isCue(board, to + 1, 'each')) board.marks.statedEach = true;
+  if (isCue(board, to + 1, 'altogether') || (hasTag(board, to + 1, 'label:total') && !isFree(board, to + 2))) board.marks.statedTotal = true;
   const isSame = before !== undefined && Math.abs(before.value - litres) <= 0.01 * before.value;
   if (isSame) board.findings.splice(board.findings.length - 1, 1);
   return to;

@@ -53,11 +53,17 @@ function asksForDose(board: Board): boolean {
   return hasAdditive(board) && hasVessel(board) && asked && !holdsCue(board, 'question');
 }
 
+/** `eyes on T4 please`: a vessel and a please, with no other business. */
+const isBarePlea = (board: Board): boolean =>
+  ['please', 'pls', 'plz', 'plse'].some((word) => board.terms.some(({ text }) => text === word)) &&
+  board.terms.length <= 6 && !holdsCue(board, 'vessel-statement') && !holdsCue(board, 'question') && !holdsCue(board, 'cleaning');
+
 function isDose(board: Board): boolean {
   if (any(board, 'target', 'ph', 'free_mg_L', 'total_mg_L')) return true;
   const moves = holdsCue(board, 'vessel-statement') && !holdsCue(board, 'how-much') && !hasAdditive(board) && !board.marks.fruitByWeight;
   if (any(board, 'volume_L') || board.marks.barrelsCounted === true || board.marks.fruitByWeight === true || (board.marks.castsWithoutSize === true && any(board, 'stage', 'style'))) return !moves;
   if (asksForDose(board)) return true;
+  if (hasVessel(board) && isBarePlea(board)) return true;
   return any(board, 'temperature_C', 'alcohol_percent', 'sugar_g_L', 'binding_share', 'binding_allowance_percent') && hasVessel(board) && !moves;
 }
 

@@ -69,7 +69,7 @@ function findFree(board: Board, candidates: readonly number[]): void {
   for (const i of left) if (isFree(board, i)) refuse(board, 'ambiguous-number', figureAt(board, i).from, rangeEnd(board, i) ?? concentrationAt(board, i + 1)?.to ?? i);
 }
 
-const CELLAR = /^(label|unit:(?!none|C|F|degree)|additive|style|category|product|stage|vessel|organic|cue:(cellar|variety|molecular|target|wine|ml))/;
+const CELLAR = /^(label|unit:(?!none|C|F|degree)|additive|style|category|product|stage|vessel|organic|cue:(cellar|variety|molecular|target|wine|ml)$)/;
 
 /** Whether the message speaks of wine at all: a cellar word, a unit, or nothing but numbers. */
 export function isCellarTalk(board: Board): boolean {

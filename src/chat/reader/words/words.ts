@@ -45,7 +45,7 @@ export type Tag =
 
 /** The groups of words that together make an emergency; `emergency.ts` holds the rules. */
 export type DangerId =
-  | 'down' | 'breathless' | 'person' | 'thing' | 'silent' | 'went-in' | 'hurt-eye' | 'swallowed' | 'drank' | 'vessel'
+  | 'down' | 'breathless' | 'person' | 'thing' | 'silent' | 'went-in' | 'hurt-eye' | 'swallowed' | 'drank' | 'vessel' | 'fell' | 'beside'
   | 'gas' | 'leak' | 'alarm' | 'elsewhere' | 'burnt' | 'chemical'; // prettier-ignore
 
 /**
