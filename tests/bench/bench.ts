@@ -17,7 +17,8 @@ function row(name: string, seen: string, aim = ''): void {
   process.stdout.write(`${name.padEnd(46)} ${seen.padStart(12)}   ${aim}\n`);
 }
 
-const ms = (milliseconds: number): string => `${milliseconds.toPrecision(3)} ms`;
+const ms = (milliseconds: number): string =>
+  `${milliseconds >= 100 ? Math.round(milliseconds) : milliseconds.toPrecision(3)} ms`;
 
 /** From the bytes of a message to the text of its replies. */
 function answer(body: string): string {

@@ -25,6 +25,7 @@ export function faults(turn: Turn): string[] {
       return wrongAnswer(reading, { ...shared, ...reading.fields }, answers[at] ?? null);
     }),
     ...readings.flatMap((reading, at) => unsaid(reading, answers[at] ?? null, handled.replies)),
+    ...handled.replies.flatMap((reply) => wrongKind(readings, reply)),
   ];
 }
 
@@ -41,6 +42,19 @@ function wrongText({ message }: Turn, reply: Reply): string[] {
     ...buttons
       .filter((button) => Buffer.byteLength(button.key) > 64)
       .map((button) => `long key ${button.key}`),
+  ];
+}
+
+/** A dose, or a button, in a reply to what must get none. */
+function wrongKind(readings: readonly Reading[], reply: Reply): string[] {
+  const every = (holds: (reading: Reading) => boolean): boolean =>
+    readings.length > 0 && readings.every(holds);
+  const doses = reply.lines.filter((line) => line.key.startsWith('dose-')).map((line) => line.key);
+  return [
+    ...(every((one) => one.problems.length > 0) ? doses.map((key) => `${key} beside a problem`) : []),
+    ...(every((one) => one.intent === 'emergency')
+      ? [...doses, ...reply.buttons.map((one) => one.label)].map((key) => `${key} in an emergency`)
+      : []),
   ];
 }
 
