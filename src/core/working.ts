@@ -37,19 +37,20 @@ export interface Term {
 }
 
 /**
- * A number as the working prints it: significant digits, without an exponent.
+ * A number as the working prints it: so many significant digits, but never coarser than ones, as a reader takes
+ * every digit before the decimal point for meant.
  *
- * @param value finite number
+ * @param value in any unit, finite
  * @param digits 1 to 15
  *
  * @example
  * ```ts
  * roundTo(256.2785, 4) // => 256.3
- * roundTo(0, 4) // => 0
+ * roundTo(10110.86, 4) // => 10111
  * ```
  */
 export function roundTo(value: number, digits: number): number {
-  return Number(value.toPrecision(digits));
+  return Math.abs(value) >= 10 ** digits ? Math.round(value) : Number(value.toPrecision(digits));
 }
 
 /**

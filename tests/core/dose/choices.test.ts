@@ -1,0 +1,66 @@
+import { describe, expect, test } from 'vitest';
+import { dose } from '../../../src/core/dose/dose.ts';
+import { ASSUMED, codesOf, doseOf, valuesOf } from './ask.ts';
+
+const RED = { style: 'red', target: { molecular_mg_L: 0.6 } } as const;
+
+describe('a high need that nobody stated is a choice', () => {
+  test('at pH 4.1 with 45 mg/L free: leave it, go to 60, or the full target', () => {
+    const answer = doseOf({ ...RED, ph: 4.1, free_mg_L: 45 });
+    expect(valuesOf(answer, 'free-needed-high')?.['target_free_mg_L']).toBeCloseTo(117.59, 2);
+    expect(answer.choices?.map(({ target, add_mg_L }) => [target, Math.round(add_mg_L)])).toEqual([
+      [undefined, 0],
+      [{ free_mg_L: 60 }, 15],
+      [{ molecular_mg_L: 0.6 }, 73],
+    ]);
+    expect(answer.choices?.map(({ molecular_mg_L }) => Number(molecular_mg_L.toFixed(2)))).toEqual([
+      0.23, 0.31, 0.6,
+    ]);
+    expect(answer.choices?.map(({ measure }) => measure?.value)).toEqual([undefined, 143, 691]);
+    expect(answer.measure).toEqual({ value: 691, unit: 'g' }); // the full figures are kept
+  });
+
+  test('60 mg/L itself is not high, a hair more is', () => {
+    // 60 = 0.6 × (10^x + 1), so x = log10(99)
+    const ph = 1.81 + Math.log10(99);
+    expect(doseOf({ ...RED, ph: ph - 1e-9 }).choices).toBeUndefined();
+    expect(doseOf({ ...RED, ph: ph + 1e-6 }).choices).toHaveLength(3);
+  });
+
+  test('with 60 mg/L free already the middle way falls away', () => {
+    expect(doseOf({ ...RED, ph: 4.1, free_mg_L: 60 }).choices?.map(({ target }) => target)).toEqual([
+      undefined,
+      { molecular_mg_L: 0.6 },
+    ]);
+  });
+
+  test.each([
+    ['a stated target', { ph: 4.1, targetStated: true }],
+    ['a wine that has enough', { ph: 4.1, free_mg_L: 120 }],
+  ])('%s is none', (_what, request) => {
+    const answer = doseOf({ ...RED, ...request });
+    expect(answer.choices).toBeUndefined();
+    expect(codesOf(answer)).not.toContain('free-needed-high');
+  });
+
+  test('without free SO2 the need is said, without a choice', () => {
+    const answer = dose({ ...ASSUMED, ...RED, ph: 4.1 });
+    expect(answer.choices).toBeUndefined();
+    expect(codesOf(answer)).toContain('free-needed-high');
+  });
+
+  test('an option that passes the limit on file carries no amount', () => {
+    const answer = doseOf({ ...RED, ph: 4.1, free_mg_L: 45, total_mg_L: 120 });
+    const [leave, to60, full] = answer.choices ?? [];
+    expect(leave).not.toHaveProperty('over_limit');
+    expect(to60?.measure).toBeDefined(); // 135 mg/L total
+    expect(full).toMatchObject({ over_limit: true }); // 193 mg/L
+    for (const key of ['mass_g', 'SO2_g', 'measure', 'stock']) expect(full).not.toHaveProperty(key);
+    expect(codesOf(answer)).toContain('total-over-limit');
+  });
+
+  test('an option whose free SO2 alone passes the limit carries none either, with the total unknown', () => {
+    const answer = doseOf({ ...RED, target: { molecular_mg_L: 0.8 }, ph: 4.15, free_mg_L: 45 });
+    expect(answer.choices?.at(-1)).toMatchObject({ over_limit: true });
+  });
+});
