@@ -81,7 +81,6 @@ dose-nothing = { at }nothing to add.
 dose-rate = { at }{ $dose } SO2 to add, that is { $amount } { additive } per { $per }
 dose-rate-bare = { at }{ $dose } SO2 to add
 dose-need = { at }at pH { $ph }, { $molecular } molecular takes { $free } free
-dose-target-free = { at }aim at { $free } free
 dose-now = { at }{ $molecular } molecular now (pH { $ph }, { $free } free)
 
 ## The first line: a choice and not a dose
@@ -90,7 +89,7 @@ choice-head = { at }a choice, not a dose: at pH { $ph }, { $target } molecular t
 choice-leave = { $mark } Leave it: { $free } free is { $molecular } molecular.
 choice-to = { $mark } To { $free } ({ $molecular } molecular): { $amount } { additive }
 choice-no-amount = { $mark } To { $free } ({ $molecular } molecular): no amount, the total would pass the limit on file.
-ways-out = Ways out: keep it colder, cleaner, checked more often; or a lower pH, with advice.
+ways-out = Ways out: colder, cleaner, checked more often; or acid for a lower pH: ask someone qualified first.
 
 ## The stage
 
@@ -116,7 +115,11 @@ no-dose-malolactic = { at }no sulfite now, malolactic is still to come.
 no-dose-molecular = Now { $molecular } molecular.
 no-dose-why = The bacteria need free below 5–10 and total below 30–40 mg/L (published for pH 3.3–3.5).
 no-dose-why-fermenting = Sulfite now is bound at once and harms yeast and bacteria: these need free below 5–10, total below 30–40 mg/L (published for pH 3.3–3.5).
-no-dose-all-the-same = Your own figure all the same? Write it with the vessel, like: T7 add 30 ppm. Ask whoever answers for this wine first.
+no-dose-all-the-same =
+    { $stage ->
+        [fermenting] Your own figure all the same? Ask whoever answers for this wine, then write it whole: T7 20 hl fermenting add 30 ppm
+       *[malolactic] Your own figure all the same? Ask whoever answers for this wine, then write it whole: T7 20 hl in ML add 30 ppm
+    }
 
 ## What it does
 
@@ -131,8 +134,6 @@ effect-share = Dose ÷ (1 − { $share }): reaches { $after } { $unit } if just 
 effect-share-bare = Dose ÷ (1 − { $share }): right if just that share binds; measure tomorrow.
 other-as-share = If instead { $percent } % of it were lost (÷ { $divisor }): { $amount }.
 other-as-allowance = As an allowance of + { $percent } % (× { $factor }): { $amount }.
-effect-now = Now { $molecular } molecular.
-effect-need = { $target } molecular takes { $free } free at pH { $ph }.
 nothing-why = { $free } free is { $molecular } molecular at pH { $ph }; the aim is { target }.
 nothing-why-free = { $free } free; the aim is { target }.
 
@@ -142,7 +143,11 @@ adds = { at }{ $list } adds { $adds } SO2
 adds-rate = { at }{ $rate } { additive } adds { $adds } SO2
 amount = { $amount } { additive }
 amount-SO2 = { $amount } SO2 from { additive }
-amount-tablets = { $amount } tablets of { additive }
+amount-tablets =
+    { $size ->
+        [none] { $amount } tablets of { additive }
+       *[other] { $amount } tablets of { $size } g { additive }
+    }
 adds-rate-mass = In { $volume } that is { $amount }.
 ferment-stop =
     { $adds ->
@@ -198,7 +203,6 @@ fact-product = { $product ->
 fact-organic = organic
 fact-stage = { stage-now }
 fact-target = aim { target }
-fact-additive = { additive }
 fact-strength = { additive }, { $strength } %
 assumed-additive = pure { additive }
 assumed-target = target { target }
@@ -208,8 +212,7 @@ assumed-gallon = { $gallon ->
         [US] US gallons
        *[imperial] imperial gallons
     }
-assumed-barrels = 225 L a barrel
-assumed-volume = { $volume }
+assumed-barrels = { $volume } at 225 L a barrel
 note-free-unlabelled = “{ $text }” is free SO2
 note-ph-unlabelled = “{ $text }” is the pH
 note-volume-sum = “{ $text }” added up
@@ -233,7 +236,11 @@ ask-volume_L =
     }
 ask-ph = { at }what pH? Like: 3.58
 ask-free_mg_L = { at }what free SO2, in { $unit }? Like: 21
-ask-target = { at }what do you aim at? Like: 30 (free), 0.6 (molecular), +25 (to add)
+ask-target =
+    { $usual ->
+        [none] { at }what do you aim at? Such wine has no usual target. Like: to 30 free, 0.6 mol, add 25 ppm
+       *[some] { at }what do you aim at? Like: to 30 free, 0.6 mol, add 25 ppm
+    }
 ask-target-stage =
     { $stage ->
         [must] { at }how many mg/L do you want to add to the must? Write it with the figures, like: T4 40 hl must add 40 ppm
@@ -261,7 +268,15 @@ problem-negative-value = { at }“{ $about }” is below zero, that cannot be. S
 problem-total-below-free = { at }the total is below the free (“{ $about }”). Free goes first: 18/60, or free 18 total 60
 problem-volume-not-positive = { at }a volume of “{ $about }” cannot be. Send it like: 1450 gal
 problem-unit-mismatch = { at }the unit does not fit in “{ $about }”. Free SO2 is in mg/L or ppm, volume in L, hl or gal.
-problem-ambiguous-number = { at }“{ $about }” can be read in more than one way. Say what it is, like: pH 3.58 free 21 1450 gal
+problem-ambiguous-number =
+    { $kind ->
+        [percent] { at }“{ $about }” could be alcohol, or the strength of more than one thing. Write 13.5% vol, or: 10% kmbs solution
+        [degree] { at }“{ $about }” could be alcohol or temperature. Write 12% vol, or 12 C
+        [rate] { at }“{ $about }” could be more than one thing: free or total SO2, SO2 or powder. Write: free 18, add 30 ppm SO2, or 5 g per 10 L kmbs
+        [thousands] { at }“{ $about }” could be off by a thousand. Write it without that mark, like: 1200 L, or 1.2 L
+        [range] { at }“{ $about }” looks like a range. Send one figure, and say what it is.
+       *[other] { at }“{ $about }” can be read in more than one way. Say what it is, like: pH 3.58 free 21 1450 gal
+    }
 problem-conflicting-values = { at }two values for one thing: “{ $about }”. Send one of them; two wines go on a line each.
 problem-unknown-additive = { at }“{ $about }” is no SO2 additive that I know. I know: potassium or sodium metabisulfite (powder, solution), bisulfite, SO2 in water, SO2 gas, tablets.
 problem-did-you-mean = { at }“{ $about }” is another chemical. Did you mean metabisulfite? Then send it again with that word.
@@ -270,7 +285,7 @@ problem-value-out-of-range = { at }“{ $about }” is more than any cellar has.
 problem-not-understood = I could not read that. Send a reading like: T4 1450 gal pH 3.58 free 21. ? shows more.
 problem-too-long = That is too long to read safely. Send at most 25 vessels at a time, a line each.
 problem-no-number = No dose until that is clear.
-bare-number = “{ $text }” of what? Write it whole, like: T7 20 hl add { $text } ppm
+bare-number = “{ $text }” of what? Write it whole, with the stage, like: T7 20 hl must add { $text } ppm
 
 ## Warnings
 
@@ -290,7 +305,7 @@ warning-total-unknown = ⚠ The total is unknown: measure it, free alone comes o
 warning-no-limit-on-file = ⚠ No limit on file for this wine: look up your country’s law.
 warning-limit-unconfirmed = ⚠ The limit is unconfirmed: look up your country’s law.
 warning-addition-large = ⚠ { $dose_mg_L } { $unit } at once is a lot: check the volume and its unit.
-warning-free-needed-high = ⚠ { $target_free_mg_L } { $unit } free is a lot: colder, cleaner, checked more often; or a lower pH, with advice.
+warning-free-needed-high = ⚠ { $target_free_mg_L } { $unit } free is a lot: keep it colder, cleaner, checked more often; or a lower pH, with advice.
 warning-molecular-above-2 = ⚠ Above 2 { $unit } molecular SO2 is smelt and tasted.
 warning-free-low-may-bind-all = ⚠ Below 10 free much or all may bind: measure before adding again.
 warning-ph-unusual = ⚠ pH { $ph } is unusual for wine: check the meter.
@@ -341,7 +356,6 @@ unreadable =
        *[other] I only read text. Please type the figures.
     }
 old-button = That button is from an older message. Please send the reading again.
-old-number = There is no button { $mark } now.
 
 ## An emergency
 
@@ -439,6 +453,5 @@ button-target = Another target
 button-more = More
 button-not-finished = Not finished
 button-red = Red
-button-finished = Finished
 button-choice-leave = Leave it
 button-choice-to = To { $free }

@@ -32,10 +32,11 @@ export function answerSingle(
   });
   const kept = keepsWaiting(reading, stillWaiting(memory, message.at));
   const asked =
-    kept && reading.problems.length > 0
-      ? askAgain(kept, outcome, memory, understood.decimalMark, settings)
-      : outcome;
-  const waiting = outcome.waits === undefined ? kept : waitFor(outcome.waits, reading, message.at, settings);
+    kept && reading.problems.length > 0 ? askAgain(kept, outcome, understood.decimalMark, settings) : outcome;
+  const waiting =
+    outcome.waits === undefined
+      ? kept
+      : waitFor(outcome.waits, { number: memory.nextNumber, reading, at: message.at }, settings);
   const reply: Reply = { language: settings.language, lines: asked.lines, buttons: asked.buttons };
   const next = nextMemory(memory, message.at, understood, [{ reading, outcome }], {
     buttons: reply.buttons,
@@ -51,14 +52,11 @@ function keepsWaiting(reading: Reading, waiting: Waiting | undefined): Waiting |
 }
 
 function askAgain(
-  { field, reading }: Waiting,
+  { field, reading, number }: Waiting,
   outcome: Outcome,
-  memory: Memory,
   mark: DecimalMark,
   settings: Settings,
 ): Pick<Outcome, 'lines' | 'buttons'> {
-  const number = memory.remembered.findLast((one) => one.reading === reading)?.number;
-  const buttons =
-    number === undefined ? [] : letterButtons(number, field, choicesFor(field, reading, settings), mark);
+  const buttons = letterButtons(number, field, choicesFor(field, reading, settings), mark);
   return { lines: [...outcome.lines, questionLine(field, reading, settings)], buttons };
 }

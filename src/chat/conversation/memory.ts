@@ -4,6 +4,8 @@ import type { AskedField, Fields, Reading } from '../reader/understood.ts';
 export interface Waiting {
   readonly field: AskedField;
   readonly reading: Reading;
+  /** The number that the reading is remembered under: the buttons of its choices carry it. */
+  readonly number: number;
   readonly askedAt: number;
   /** Choices of that field carry letters: `a` → the fields it stands for. */
   readonly letters: Readonly<Record<string, Fields>>;

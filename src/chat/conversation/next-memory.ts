@@ -33,8 +33,8 @@ export function keeping(message: IncomingMessage, memory: Memory): Handled['writ
 }
 
 /** The question for a field, which waits from this moment on. */
-export function waitFor(field: AskedField, reading: Reading, at: number, settings: Settings): Waiting {
-  return { field, reading, askedAt: at, letters: lettersOf(choicesFor(field, reading, settings)) };
+export function waitFor(field: AskedField, { number, reading, at }: Remembered, settings: Settings): Waiting {
+  return { field, reading, number, askedAt: at, letters: lettersOf(choicesFor(field, reading, settings)) };
 }
 
 /** Only what has a number of its own can be meant by a later button. */

@@ -39,7 +39,7 @@ export function handlePress(
     case 'red':
       return again(complete(found.reading, { fields: { style: 'red' } }, settings));
     case 't':
-      return askTarget(message, found.reading, memory, settings);
+      return askTarget(message, found, memory, settings);
     case 'c': {
       const choice = chosen(found.reading, Number(button.which), markOf(memory), settings);
       if (choice === undefined) return saying(settings, [line('first', 'old-button')]);
@@ -90,11 +90,19 @@ function moreOf(message: IncomingMessage, found: Remembered, memory: Memory, set
 }
 
 /** Another target for a reading: it is asked for and waits, without the one before. */
-function askTarget(message: IncomingMessage, reading: Reading, memory: Memory, settings: Settings): Handled {
+function askTarget(
+  message: IncomingMessage,
+  { number, reading }: Remembered,
+  memory: Memory,
+  settings: Settings,
+): Handled {
   const { target: _target, ...fields } = reading.fields;
   const { assumed: _assumed, asks: _asks, ...draft } = reading;
   const without = finishReading({ ...draft, fields }, settings);
-  const next: Memory = { ...memory, waiting: waitFor('target', without, message.at, settings) };
+  const next: Memory = {
+    ...memory,
+    waiting: waitFor('target', { number, reading: without, at: message.at }, settings),
+  };
   const question = questionLine('target', without, settings, 'first');
   const ofWhich = line('first', 'target-of', { vessel: vesselText(reading) });
   return { ...saying(settings, [ofWhich, question]), writes: keeping(message, next) };

@@ -9,6 +9,7 @@ import type { Handled, IncomingMessage } from './ports.ts';
 import { handlePress } from './press.ts';
 import type { Settings } from './settings.ts';
 import { stillWaiting } from './waiting.ts';
+import { withShared } from './with-shared.ts';
 
 /** A text: a mark of a button, an answer to the question that waits, or a message of its own. */
 export function handleText(
@@ -42,7 +43,9 @@ export function handleText(
 
 /** The message with its one reading completed by the one that waits, where it completes it. */
 function completed(understood: Understood, waiting: Waiting | undefined, settings: Settings): Understood {
-  const [next] = understood.readings;
-  if (!waiting || !next || next.problems.length > 0 || !completes(waiting.reading, next)) return understood;
-  return { ...understood, readings: [complete(waiting.reading, next, settings)] };
+  const [only] = understood.readings;
+  if (!waiting || !only || only.problems.length > 0) return understood;
+  const next = withShared(only, understood.shared);
+  if (!completes(waiting.reading, next)) return understood;
+  return { ...understood, readings: [complete(waiting.reading, next, settings)], shared: {} };
 }

@@ -1,7 +1,8 @@
 import type { Line } from './reply.ts';
 
-/** Letters in a row that a phone shows, and rows that a reply may take; both by the look of a small phone. */
+/** Letters in a row that a small phone shows. */
 export const PHONE_COLUMNS = 45;
+/** Rows of it that a reply may take. */
 export const MOST_ROWS = 25;
 
 /** A line with its finished text. */

@@ -11,7 +11,7 @@ const THIN_SPACE = '\u202f';
  * @example
  * ```ts
  * numberText(5488.85, 0, '.') // => "5\u202f489"
- * numberText(0.3550, 2, ',') // => "0,36"
+ * numberText(0.356, 2, ',') // => "0,36"
  * numberText(0.8, 2, '.') // => "0.8"
  * ```
  */
@@ -22,4 +22,29 @@ export function numberText(value: number, decimals: number, mark: DecimalMark): 
   const grouped = whole.replace(/(?<=\d)(?=(?:\d{3})+$)/g, THIN_SPACE);
   const sign = value < 0 && (kept !== '' || /[1-9]/.test(whole)) ? '-' : '';
   return `${sign}${grouped}${kept === '' ? '' : mark + kept}`;
+}
+
+/** Shares that people write as a fraction. */
+const FRACTIONS = [
+  [1, 2],
+  [1, 3],
+  [2, 3],
+  [1, 4],
+  [3, 4],
+  [1, 5],
+  [2, 5],
+] as const;
+
+/**
+ * A share from 0 to 1 as people write it: a small fraction, else to 0.01.
+ *
+ * @example
+ * ```ts
+ * shareText(1 / 3, '.') // => "1/3"
+ * shareText(0.35, ',') // => "0,35"
+ * ```
+ */
+export function shareText(share: number, mark: DecimalMark): string {
+  const found = FRACTIONS.find(([over, under]) => Math.abs(share - over / under) < 1e-4);
+  return found ? found.join('/') : numberText(share, 2, mark);
 }

@@ -35,7 +35,7 @@ const SAID_BY_THE_CHOICE: readonly WarningCode[] = [
 export function answerDose(reading: Reading, turn: Turn): Outcome {
   const request = toDoseRequest(reading, turn.settings.basis);
   const answer = dose(request);
-  if (reading.notes.some(({ id }) => id === 'ferment-stop')) return fermentStop(reading, {}, turn);
+  if (reading.notes.some(({ id }) => id === 'ferment-stop')) return fermentStop(reading, null, turn);
   const refused = noDose(reading, answer, turn);
   if (refused) return refused;
   if (reading.asks.length > 0) return partialDose(reading, request, answer, turn);

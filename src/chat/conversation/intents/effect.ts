@@ -7,7 +7,7 @@ import { assumedLines } from '../lines/assumed.ts';
 import { cautionLines } from '../lines/cautions.ts';
 import { factLines } from '../lines/facts.ts';
 import { landingLine } from '../lines/landing.ts';
-import { line, listLine } from '../lines/line.ts';
+import { line } from '../lines/line.ts';
 import { vesselText } from '../lines/vessel.ts';
 import { warningLines } from '../lines/warnings.ts';
 import { workingLines } from '../lines/working.ts';
@@ -63,7 +63,5 @@ function firstOfEffect(reading: Reading, answer: EffectAnswer, { manner }: Turn)
     return [first, line('first', 'adds-rate-mass', { volume, amount })];
   }
   const amount = statedAmount(fields, additive, manner.mark);
-  return amount === undefined
-    ? listLine('first', 'adds-bare', [])
-    : [{ ...line('first', 'adds', values), list: [amount] }];
+  return amount === undefined ? [] : [{ ...line('first', 'adds', values), list: [amount] }];
 }

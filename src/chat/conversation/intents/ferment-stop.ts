@@ -7,11 +7,11 @@ import { perLitre } from '../manner.ts';
 import type { Outcome, Turn } from '../outcome.ts';
 
 /** Someone wants to stop a fermentation with SO2: what that amount is, that it does not, whom to ask; no dose. */
-export function fermentStop(reading: Reading, answer: Pick<EffectAnswer, 'adds_mg_L'>, turn: Turn): Outcome {
-  const adds = answer.adds_mg_L === undefined ? 'none' : perLitre(answer.adds_mg_L, turn.manner);
+export function fermentStop(reading: Reading, answer: EffectAnswer | null, turn: Turn): Outcome {
+  const adds = answer?.adds_mg_L === undefined ? 'none' : perLitre(answer.adds_mg_L, turn.manner);
   const first = line('first', 'ferment-stop', { adds });
   return {
-    answer: answer as Outcome['answer'],
+    answer,
     inRound: [first],
     lines: [
       first,

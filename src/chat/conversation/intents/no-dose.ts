@@ -45,7 +45,13 @@ function noSulfiteNow(
   return {
     answer,
     inRound: [first],
-    lines: [first, ...molecular, why, line('effect', 'no-dose-all-the-same'), ...echo(reading, turn)],
+    lines: [
+      first,
+      ...molecular,
+      why,
+      line('effect', 'no-dose-all-the-same', { stage }),
+      ...echo(reading, turn),
+    ],
     buttons: [],
     askedTarget: true,
   };

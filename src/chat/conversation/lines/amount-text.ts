@@ -13,6 +13,11 @@ export function additiveVolumeText(additive_volume_mL: number, mark: DecimalMark
   return `${numberText(additive_volume_mL, additive_volume_mL >= 9.95 ? 0 : 1, mark)} mL`;
 }
 
+function sizeOf(fields: Fields | Partial<Amount>, mark: DecimalMark): string {
+  const size = 'tablet_salt_g' in fields ? fields.tablet_salt_g : undefined;
+  return size === undefined ? 'none' : numberText(size, 2, mark);
+}
+
 /** The amount that a person stated, as it goes into a list or a line; undefined where none is. */
 export function statedAmount(
   fields: Fields | Partial<Amount>,
@@ -20,7 +25,11 @@ export function statedAmount(
   mark: DecimalMark,
 ): Omit<Line, 'room'> | undefined {
   if (fields.tablets !== undefined)
-    return part('amount-tablets', { amount: numberText(fields.tablets, 2, mark), additive });
+    return part('amount-tablets', {
+      amount: numberText(fields.tablets, 2, mark),
+      additive,
+      size: sizeOf(fields, mark),
+    });
   if (fields.additive_volume_mL !== undefined)
     return part('amount', { amount: additiveVolumeText(fields.additive_volume_mL, mark), additive });
   if (fields.mass_g === undefined) return undefined;

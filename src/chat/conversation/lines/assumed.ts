@@ -26,9 +26,8 @@ function filledIn({ assumed, fields, asks }: Reading, manner: Manner, weighs: bo
     parts.push(part('assumed-additive', { additive: assumed.additive }));
   if (assumed.target) parts.push(part(targetKey(fields), targetValues(assumed.target, manner)));
   if (assumed.gallon) parts.push(part('assumed-gallon', { gallon: assumed.gallon }));
-  if (assumed.volume_L !== undefined && manner.volumeUnit !== 'barrel' && fields.vessels === undefined)
-    parts.push(part('assumed-volume', { volume: volumeText(assumed.volume_L, 'L', manner.mark) }));
-  else if (assumed.volume_L !== undefined) parts.push(part('assumed-barrels'));
+  if (assumed.volume_L !== undefined)
+    parts.push(part('assumed-barrels', { volume: volumeText(assumed.volume_L, 'L', manner.mark) }));
   return parts;
 }
 

@@ -5,7 +5,7 @@ import { line, listLine, part } from './line.ts';
 
 /** The cautions of an additive: in full the first time in a day, then one line with the button `Safety`. */
 export function cautionLines(additive: AdditiveId, inFull: boolean): Line[] {
-  if (!inFull) return [line('caution', 'cautions-short', { additive })];
+  if (!inFull) return [line('caution', 'cautions-short')];
   return listLine(
     'caution',
     'cautions',

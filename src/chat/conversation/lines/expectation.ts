@@ -1,7 +1,7 @@
 import { bindingCovered } from '../../../core/binding/allowance.ts';
 import type { DoseAnswer } from '../../../core/dose/answer.ts';
 import type { Reading } from '../../reader/understood.ts';
-import { numberText } from '../../replies/number-text.ts';
+import { numberText, shareText } from '../../replies/number-text.ts';
 import { concentrationText, measureText } from '../../replies/quantity-text.ts';
 import type { Line } from '../../replies/reply.ts';
 import type { Manner } from '../manner.ts';
@@ -49,7 +49,7 @@ function allowance(percent: number, answer: DoseAnswer, manner: Manner): Line[] 
 
 function shareLost(share: number, answer: DoseAnswer, manner: Manner): Line[] {
   const where = reached(answer, manner);
-  const values = { share: numberText(share, 2, manner.mark), ...where };
+  const values = { share: shareText(share, manner.mark), ...where };
   return [line('effect', where ? 'effect-share' : 'effect-share-bare', values)];
 }
 

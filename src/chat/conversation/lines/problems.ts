@@ -8,10 +8,23 @@ export function problemLines(reading: Reading, vessel: string): Line[] {
   const lines = reading.problems.map(({ code, about }) => {
     const suggested = code === 'unknown-additive' && noteText(reading, 'did-you-mean') !== undefined;
     const key = suggested ? 'problem-did-you-mean' : `problem-${code}`;
-    return line('first', key, { vessel, about: shortened(about) });
+    return line('first', key, { vessel, about: shortened(about), kind: kindOf(about) });
   });
   const only = reading.problems.every(({ code }) => code === 'not-understood' || code === 'too-long');
   return only ? lines : [...lines, line('question', 'problem-no-number')];
+}
+
+/** Which kind of figure can be read in more than one way, by the look of it: each has its own way to write it plainly. */
+const KINDS: readonly (readonly [RegExp, string])[] = [
+  [/%/, 'percent'],
+  [/°/, 'degree'],
+  [/g\s*(\/|per)\s*h|g\/L|ppm|mg/i, 'rate'],
+  [/^\D*\d{1,3}[.,]\d{3}(\D|$)/, 'thousands'],
+  [/\d\s*[-–]\s*\d/, 'range'],
+];
+
+function kindOf(about: string): string {
+  return KINDS.find(([pattern]) => pattern.test(about))?.[1] ?? 'other';
 }
 
 /** The person's own words, cut where they would fill the screen. */

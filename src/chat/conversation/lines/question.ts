@@ -23,9 +23,19 @@ function questionOf(field: AskedField, reading: Reading, settings: Settings): Om
     if (noteText(reading, 'fruit-by-weight') !== undefined) return { key: 'ask-fruit', values: {} };
     return { key: 'ask-volume_L', values: { unit: settings.volumeUnit } };
   }
-  if (field === 'target' && (reading.fields.stage === 'must' || reading.fields.stage === 'base'))
-    return { key: 'ask-target-stage', values: { stage: reading.fields.stage } };
+  if (field === 'target') return targetQuestion(reading);
   if (field === 'mass_g' && noteText(reading, 'spoon') !== undefined)
     return { key: 'ask-mass-spoon', values: {} };
   return { key: `ask-${field}`, values: { unit } };
+}
+
+/** At some stages it is asked what is added; and some wine has no usual target, which is said. */
+function targetQuestion({ fields }: Reading): Omit<Line, 'room'> {
+  if (fields.stage === 'must' || fields.stage === 'base')
+    return { key: 'ask-target-stage', values: { stage: fields.stage } };
+  const unusual = fields.category === 'sparkling' || fields.category === 'fortified';
+  return {
+    key: 'ask-target',
+    values: { usual: unusual || (fields.alcohol_percent ?? 0) >= 17 ? 'none' : 'some' },
+  };
 }

@@ -52,7 +52,11 @@ export function allWarningLines(warnings: readonly Warning[], manner: Manner): L
 
 function warningLine({ code, values }: Warning, manner: Manner, room: Line['room']): Line {
   const texts = Object.entries(values).map(([name, value]) => [name, textOf(name, value, manner)] as const);
-  return line(room, `warning-${code}`, { unit: manner.unit, ...Object.fromEntries<string>(texts) });
+  const change = values['need_change_mg_L'] === undefined ? '' : '-change';
+  return line(room, `warning-${code}${code === 'basis-fallback' ? change : ''}`, {
+    unit: manner.unit,
+    ...Object.fromEntries<string>(texts),
+  });
 }
 
 /** A warning's figure by its name: molecular SO2 to 0.01, concentrations to 1 or 0.1, the rest to 0.01. */
