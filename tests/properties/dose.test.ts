@@ -1,84 +1,8 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
-import type { AdditiveAtHand } from '../../src/core/additives/additive-id.ts';
 import { dose } from '../../src/core/dose/dose.ts';
 import { effect } from '../../src/core/dose/effect.ts';
-import type { DoseRequest } from '../../src/core/dose/request.ts';
-import { plainText } from '../../src/core/working.ts';
-import { toStep } from '../../src/core/dose/rounding.ts';
-import { LITRES_IN, VOLUME_UNITS } from '../../src/core/units/volume.ts';
-import { loose, wrongIn } from '../core/dose/evaluate-step.ts';
-
-const upTo = (min: number, max: number): fc.Arbitrary<number> =>
-  fc.double({ min, max, noNaN: true, noDefaultInfinity: true });
-/** A figure as a person types it. */
-const typed = (min: number, max: number, decimals: number): fc.Arbitrary<number> =>
-  upTo(min, max).map((value) => Number(value.toFixed(decimals)));
-
-const additives = fc.constantFrom<AdditiveAtHand>(
-  { id: 'potassium-metabisulfite' },
-  { id: 'potassium-metabisulfite', strength_percent: 96 },
-  { id: 'potassium-metabisulfite', strength_percent: 57 },
-  { id: 'potassium-metabisulfite', tablet_salt_g: 0.44 },
-  { id: 'sodium-metabisulfite' },
-  { id: 'potassium-metabisulfite-solution', strength_percent: 10 },
-  { id: 'potassium-bisulfite-solution', strength_percent: 15 },
-  { id: 'potassium-bisulfite-solution', strength_percent: 30, strength_of: 'salt' },
-  { id: 'ammonium-bisulfite-solution', strength_percent: 40 },
-  { id: 'sulfur-dioxide-solution', strength_percent: 6 },
-  { id: 'sulfur-dioxide-gas' },
-  { id: 'sulfur-dioxide-gas', strength_percent: 99.9 },
-  { id: 'tablet', tablet_SO2_g: 5 },
-);
-
-const volumes = fc
-  .record({ value: typed(0.5, 10_000, 1), unit: fc.constantFrom(...VOLUME_UNITS) })
-  .map((volume_display) => ({
-    volume_display,
-    volume_L: volume_display.value * LITRES_IN[volume_display.unit],
-  }));
-
-const requests: fc.Arbitrary<DoseRequest & { volume_L: number; ph: number; free_mg_L: number }> = fc
-  .tuple(
-    volumes,
-    fc.record({
-      ph: typed(2.8, 4.2, 2),
-      free_mg_L: typed(0, 60, 1),
-      additive: additives,
-      target: fc.oneof(
-        typed(0.3, 2, 2).map((molecular_mg_L) => ({ molecular_mg_L })),
-        typed(1, 120, 1).map((free_mg_L) => ({ free_mg_L })),
-        typed(1, 120, 1).map((add_mg_L) => ({ add_mg_L })),
-      ),
-      targetStated: fc.boolean(),
-      stage: fc.constant('finished' as const),
-      stageStated: fc.boolean(),
-      basis: fc.constantFrom('pk-1.81' as const, 'oiv' as const),
-      alcohol_percent: typed(8, 16, 1),
-      temperature_C: typed(15, 30, 0),
-      style: fc.constantFrom('red' as const, 'white' as const),
-    }),
-    fc.oneof(
-      fc.constant({}),
-      typed(1, 100, 0).map((binding_allowance_percent) => ({ binding_allowance_percent })),
-      fc.constantFrom({ binding_share: 1 / 3 }, { binding_share: 0.5 }, { binding_share: 0.35 }),
-    ),
-    fc.oneof(
-      fc.constant({}),
-      fc.integer({ min: 2, max: 40 }).map((vessels) => ({ vessels })),
-    ),
-    fc.oneof(
-      fc.constant({}),
-      typed(60, 300, 0).map((total_mg_L) => ({ total_mg_L })),
-    ),
-  )
-  .map(([volume, request, allowance, vessels, total]) => ({
-    ...volume,
-    ...request,
-    ...allowance,
-    ...vessels,
-    ...total,
-  }));
+import { requests, upTo } from './wines.ts';
 
 describe('dose() and effect() are two ways to one number', () => {
   test('what a dose without allowance says, put back in, gives its target', () => {
@@ -150,44 +74,6 @@ describe('dose() agrees with plain arithmetic', () => {
         },
       ),
       { numRuns: 10_000, seed: 2 },
-    );
-  });
-});
-
-describe('the working', () => {
-  test('evaluates line by line as it stands, each line carries on with the printed one, the last gives the measure', () => {
-    fc.assert(
-      fc.property(requests, (request) => {
-        const { steps, measure } = dose(request);
-        expect(steps.map(wrongIn).filter(Boolean)).toEqual([]);
-        expect(loose(steps)).toEqual([]);
-        const last = steps.at(-1)?.result;
-        if (measure === undefined || last === undefined) return;
-        const size =
-          measure.unit === 'kg' || measure.unit === 'L'
-            ? Number((measure.value * 1000).toFixed(2))
-            : measure.value;
-        // The printed line rounds to the very figure that the instrument shows, by one of the instrument's steps.
-        const steps_of = last.unit === '' ? [0.5] : [0.01, 0.1, 1, 10];
-        const rounded = steps_of.flatMap((one) => [toStep(last.value, one), toStep(last.value, one, true)]);
-        expect(rounded).toContain(size);
-      }),
-      { numRuns: 1500, seed: 3 },
-    );
-  });
-
-  test('shows no raw double: no number of more than 15 digits, none with an exponent', () => {
-    fc.assert(
-      fc.property(requests, (request) => {
-        for (const { substituted, result } of dose(request).steps) {
-          for (const number of `${substituted} ${plainText(result.value)}`.match(/[\d.]+(e[-+]?\d+)?/g) ??
-            []) {
-            expect(number).not.toContain('e');
-            expect(number.replace(/^0\.0*|\./g, '').length).toBeLessThanOrEqual(15);
-          }
-        }
-      }),
-      { numRuns: 1500, seed: 4 },
     );
   });
 });

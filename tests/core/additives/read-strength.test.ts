@@ -50,7 +50,7 @@ test.each([
   ['potassium-metabisulfite', Number.NaN, {}, OUT],
   ['potassium-metabisulfite', -57, {}, OUT],
 ] as const)('%s of %d %% (%j) is %s', (id, percent, said, expected) => {
-  const { salt = false, named = false } = { salt: false, named: false, ...said };
+  const { salt, named } = { salt: false, named: false, ...said };
   const read = readStrength(id, percent, salt, named);
   expect('kind' in read ? read.kind : read.problem).toBe(expected);
 });
