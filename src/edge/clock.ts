@@ -1,9 +1,9 @@
 /** The time, handed in wherever it is needed, so that a test can hold it. */
 export interface Clock {
   /** Milliseconds since 1970. */
-  now(): number;
+  readonly now: () => number;
   /** Resolves after `ms` milliseconds, or as soon as `signal` is aborted. Never rejects. */
-  wait(ms: number, signal?: AbortSignal): Promise<void>;
+  readonly wait: (ms: number, signal?: AbortSignal) => Promise<void>;
 }
 
 /** The clock of the machine. */

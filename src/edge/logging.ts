@@ -1,10 +1,7 @@
 import { pino, type DestinationStream, type Logger } from 'pino';
 
 import { hideSecret } from './hide-secret.ts';
-
-/** The levels of `LOG_LEVEL`, from talkative to silent. */
-export const LOG_LEVELS = ['trace', 'debug', 'info', 'warn', 'error', 'fatal', 'silent'] as const;
-export type LogLevel = (typeof LOG_LEVELS)[number];
+import type { LogLevel } from './log-level.ts';
 
 /** What the rest of the program needs of a log: data first, then a sentence. */
 export type Log = Pick<Logger, 'debug' | 'info' | 'warn' | 'error' | 'fatal'>;

@@ -4,9 +4,9 @@ import { EXIT, OperatorError } from './operator-error.ts';
 /** Whoever runs the program: plain sentences on stderr, and the exit status. */
 export interface Operator {
   /** Shows a sentence. */
-  tell(sentence: string): void;
+  readonly tell: (sentence: string) => void;
   /** Ends the process: with the sentence and status of an OperatorError, else with the trace of the fault. */
-  end(error: unknown): never;
+  readonly end: (error: unknown) => never;
 }
 
 /** Makes the way to the operator, on which the secret is never shown. */
@@ -20,11 +20,16 @@ export function createOperator(secret: string | undefined): Operator {
         tell(error.message);
         process.exit(error.exitStatus);
       }
+      // Whoever read our output has gone: there is nobody to tell.
+      if (isClosedPipe(error)) process.exit(EXIT.fine);
       tell(`brimnote stopped by a fault of its own.\n${traceOf(error)}`);
       process.exit(EXIT.software);
     },
   };
 }
+
+const isClosedPipe = (error: unknown): boolean =>
+  error instanceof Error && (error as NodeJS.ErrnoException).code === 'EPIPE';
 
 const traceOf = (error: unknown): string => {
   if (!(error instanceof Error)) return String(error);

@@ -1,9 +1,9 @@
 import type { Handled, IncomingMessage, StatePort } from '../../chat/conversation/ports.ts';
 import type { Memory } from '../../chat/conversation/memory.ts';
-import type { Reply } from '../../chat/replies/reply.ts';
+import type { Say } from '../../chat/replies/say.ts';
+import type { Clock } from '../clock.ts';
 import type { Log } from '../logging.ts';
 import { failureOf } from './failure.ts';
-import type { SaidReply } from './from-reply.ts';
 import { clientSignal, type Platform } from './platform.ts';
 import { sendReplies } from './send-replies.ts';
 import type { Arrival } from './to-message.ts';
@@ -11,13 +11,17 @@ import type { Arrival } from './to-message.ts';
 /** The conversation, handed in: it computes and neither keeps nor sends. */
 export interface Conversation {
   readonly handle: (message: IncomingMessage, memory: Memory) => Handled;
-  readonly say: (reply: Reply) => SaidReply;
+  readonly say: Say;
 }
+
+/** So long an answer waits for its tap to be acknowledged, in milliseconds. */
+const LONGEST_TAP_WAIT_MS = 1000;
 
 /** What answering needs. */
 export interface AnswerOptions extends Conversation {
   readonly state: StatePort;
   readonly platform: Platform;
+  readonly clock: Clock;
   readonly log: Log;
   /** Aborted when there is no time left. */
   readonly signal: AbortSignal;
@@ -28,13 +32,15 @@ export interface AnswerOptions extends Conversation {
  * logged. Gives back whether the arrival is done with; if not, the platform has to deliver it again.
  */
 export async function answerArrival(arrival: Arrival, options: AnswerOptions): Promise<boolean> {
-  const { handle, say, state, platform, log, signal } = options;
+  const { handle, say, state, platform, clock, log, signal } = options;
   const { message, chatId, updateId, tapId } = arrival;
   if (signal.aborted) return false;
   const told = tapId === undefined ? undefined : tellTapSeen(tapId, options);
   try {
     const { writes, replies } = handle(message, await state.load(message));
     await state.commit(writes);
+    // Before the answer, but an acknowledgement that is slow to come holds nothing up.
+    if (told !== undefined) await Promise.race([told, clock.wait(LONGEST_TAP_WAIT_MS)]);
     const sent = await sendReplies(chatId, replies.map(say), { api: platform.patient, log, signal });
     return sent === 'ended';
   } catch (error) {

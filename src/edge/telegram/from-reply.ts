@@ -1,10 +1,5 @@
+import type { Said } from '../../chat/replies/say.ts';
 import { splitText } from './split-text.ts';
-
-/** A reply as a person gets it: finished text, and buttons to tap. */
-export interface SaidReply {
-  readonly text: string;
-  readonly buttons: readonly { readonly key: string; readonly mark: string; readonly label: string }[];
-}
 
 /** One call of `sendMessage`. */
 export interface Sending {
@@ -25,7 +20,7 @@ const SHORT_LABEL = 20;
  * wrote becomes markup; split at a line where it is too long, with the buttons under the last piece. A button
  * whose key the platform would refuse is left out, as it would take the whole message with it.
  */
-export function toSendings(chatId: number, reply: SaidReply): Sending[] {
+export function toSendings(chatId: number, reply: Said): Sending[] {
   const pieces = splitText(reply.text);
   const rows = keyboardRows(reply.buttons);
   return pieces.map((text, index) => ({
@@ -36,7 +31,7 @@ export function toSendings(chatId: number, reply: SaidReply): Sending[] {
   }));
 }
 
-const keyboardRows = (buttons: SaidReply['buttons']): { text: string; callback_data: string }[][] => {
+const keyboardRows = (buttons: Said['buttons']): { text: string; callback_data: string }[][] => {
   const rows: { text: string; callback_data: string }[][] = [];
   for (const { key, label } of buttons) {
     if (key === '' || label.trim() === '' || Buffer.byteLength(key) > LONGEST_KEY_BYTES) continue;

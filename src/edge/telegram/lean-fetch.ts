@@ -99,7 +99,6 @@ const readWhole = (response: HttpResponse): Promise<string> =>
     response.on('data', (part: Buffer) => parts.push(part));
     response.on('end', () => resolve(Buffer.concat(parts).toString('utf8')));
     response.on('error', reject);
-    response.on('aborted', () => reject(new NoAnswer('the connection was cut in the middle of the answer')));
   });
 
 const parse = (text: string, status: number | undefined): unknown => {

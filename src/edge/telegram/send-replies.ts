@@ -1,8 +1,9 @@
 import type { Api } from 'grammy';
 
+import type { Said } from '../../chat/replies/say.ts';
 import type { Log } from '../logging.ts';
 import { failureOf } from './failure.ts';
-import { toSendings, type SaidReply } from './from-reply.ts';
+import { toSendings } from './from-reply.ts';
 import { clientSignal } from './platform.ts';
 
 /** What sending needs. */
@@ -19,7 +20,7 @@ export interface SendOptions {
  */
 export async function sendReplies(
   chatId: number,
-  replies: readonly SaidReply[],
+  replies: readonly Said[],
   { api, log, signal }: SendOptions,
 ): Promise<'ended' | 'given up'> {
   for (const reply of replies) {

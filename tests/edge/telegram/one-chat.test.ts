@@ -2,6 +2,7 @@ import { describe, expect, test } from 'vitest';
 
 import { createMemoryStore } from '../../../src/edge/store/memory.ts';
 import { Person } from './person.ts';
+import type { Fault } from './fake-bot-api.ts';
 import { openScene } from './scene.ts';
 
 describe('what goes wrong in one chat', () => {
@@ -62,5 +63,34 @@ describe('what goes wrong in one chat', () => {
     full = false;
     rosa.sends('second');
     expect(await rosa.reads(1)).toBe('1: second');
+  });
+});
+
+describe('a tap', () => {
+  test('is acknowledged and answered', async () => {
+    await using scene = await openScene();
+    const { api, rosa, serve } = scene;
+    serve();
+    rosa.sends('first');
+    await rosa.reads(1);
+    rosa.taps('again');
+    expect(await rosa.reads(2)).toBe('2: pressed again:1');
+    await api.until(() => api.callsOf('answerCallbackQuery').length > 0);
+    expect(api.callsOf('answerCallbackQuery')).toEqual([{ callback_query_id: 'tap-2' }]);
+  });
+
+  test.each<[string, Fault]>([
+    ['too old to be acknowledged', { error_code: 400, description: 'Bad Request: query is too old' }],
+    ['acknowledged in vain', 'reset'],
+  ])('that is %s is answered all the same', async (_, fault) => {
+    await using scene = await openScene();
+    const { api, rosa, serve } = scene;
+    api.fail('answerCallbackQuery', fault);
+    const bot = serve();
+    rosa.sends('first');
+    await rosa.reads(1);
+    rosa.taps('again');
+    expect(await rosa.reads(2)).toBe('2: pressed again:1');
+    expect(bot.logged.filter((line) => /"level":[456]0/.test(line))).toEqual([]);
   });
 });

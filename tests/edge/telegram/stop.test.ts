@@ -3,6 +3,7 @@ import { describe, expect, test } from 'vitest';
 import type { Fault } from './fake-bot-api.ts';
 import { SERVER_ERROR } from './fault.ts';
 import { openScene } from './scene.ts';
+import { handle } from './stub-conversation.ts';
 
 describe('a stop', () => {
   test('finishes what is in hand, and tells the platform what was received', async () => {
@@ -37,12 +38,20 @@ describe('a stop', () => {
     await using scene = await openScene();
     const { api, rosa, serve } = scene;
     api.fail('sendMessage', 'hang');
-    const bot = serve({ times: { finish_s: 50 } });
+    const handled: string[] = [];
+    const bot = serve({
+      times: { finish_s: 50 },
+      handle: (message, memory) => {
+        handled.push(message.id);
+        return handle(message, memory);
+      },
+    });
     rosa.sends('first');
     rosa.sends('second');
     await api.until(() => api.callsOf('sendMessage').length > 0);
     await bot.stop();
     expect(rosa.texts).toEqual([]);
+    expect(handled).toEqual(['message 1']);
     expect(bot.logged.join('')).toContain('"left":2');
   });
 

@@ -1,7 +1,7 @@
 import type { Handled, IncomingMessage } from '../../../src/chat/conversation/ports.ts';
 import type { Memory } from '../../../src/chat/conversation/memory.ts';
 import type { Reply } from '../../../src/chat/replies/reply.ts';
-import type { SaidReply } from '../../../src/edge/telegram/from-reply.ts';
+import type { Said } from '../../../src/chat/replies/say.ts';
 
 /** Answers each message with its count in this conversation and what it was; `two` brings two replies. */
 export function handle(message: IncomingMessage, memory: Memory): Handled {
@@ -28,7 +28,7 @@ export function handle(message: IncomingMessage, memory: Memory): Handled {
 }
 
 /** Says such a reply. */
-export function say({ lines, buttons }: Reply): SaidReply {
+export function say({ lines, buttons }: Reply): Said {
   return {
     text: lines.map((line) => line.values['text'] ?? '').join('\n'),
     buttons: buttons.map(({ key, mark, label }) => ({ key, mark, label })),

@@ -1,0 +1,3 @@
+/** The levels of `LOG_LEVEL`, from talkative to silent. */
+export const LOG_LEVELS = ['trace', 'debug', 'info', 'warn', 'error', 'fatal', 'silent'] as const;
+export type LogLevel = (typeof LOG_LEVELS)[number];

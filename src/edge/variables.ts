@@ -1,0 +1,43 @@
+import { z } from 'zod';
+
+import { LOG_LEVELS } from './log-level.ts';
+
+const url = (protocols: RegExp, sentence: string): z.ZodString =>
+  z.string().refine((text) => URL.canParse(text) && protocols.test(new URL(text).protocol), sentence);
+
+/**
+ * The variables of the environment, with one sentence for each that is wrong. The sentence never repeats the value,
+ * which may be a secret that went into the wrong line.
+ */
+export const VARIABLES = z.object({
+  BOT_TOKEN: z
+    .string()
+    .regex(
+      /^[\w:-]+$/,
+      'BOT_TOKEN is not a bot token: copy it whole, digits, a colon, then letters and digits.',
+    )
+    .optional(),
+  BOT_API_ROOT: url(
+    /^https?:$/,
+    'BOT_API_ROOT is not an address: it must begin with https:// or http://, or be left out.',
+  ).optional(),
+  LOG_LEVEL: z
+    .enum(LOG_LEVELS, `LOG_LEVEL is not a level: it must be one of ${LOG_LEVELS.join(', ')}, or be left out.`)
+    .optional(),
+  DATA_FILE: z.string().optional(),
+  WEBHOOK_URL: url(
+    /^https:$/,
+    'WEBHOOK_URL is not an address: it must begin with https://, or be left out.',
+  ).optional(),
+  WEBHOOK_SECRET: z
+    .string()
+    .regex(/^[\w-]{1,256}$/, 'WEBHOOK_SECRET must be 1 to 256 letters, digits, _ or -, or be left out.')
+    .optional(),
+  PORT: z
+    .string()
+    .refine(
+      (text) => /^\d{1,5}$/.test(text) && Number(text) <= 65_535,
+      'PORT must be a whole number from 0 to 65535, or be left out.',
+    )
+    .optional(),
+});
