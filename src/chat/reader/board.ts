@@ -41,7 +41,8 @@ export interface Board {
 export type Finder = (board: Board) => void;
 
 /** Whether term `i` carries a tag. */
-export const hasTag = (board: Board, i: number, tag: Tag): boolean => board.terms[i]?.tags.includes(tag) === true;
+export const hasTag = (board: Board, i: number, tag: Tag): boolean =>
+  board.terms[i]?.tags.includes(tag) === true;
 
 /** Whether term `i` carries a cue. */
 export const isCue = (board: Board, i: number, cue: CueId): boolean => hasTag(board, i, `cue:${cue}`);
@@ -56,7 +57,8 @@ export const isMark = (board: Board, i: number, mark: string): boolean => {
 };
 
 /** Whether term `i` is a numeral that nothing has claimed yet. */
-export const isFree = (board: Board, i: number): boolean => board.terms[i]?.kind === 'number' && board.taken[i] !== true;
+export const isFree = (board: Board, i: number): boolean =>
+  board.terms[i]?.kind === 'number' && board.taken[i] !== true;
 
 /** The person's own words from term `from` to term `to`. */
 export function wordsOf(board: Board, from: number, to: number): string {
@@ -79,7 +81,14 @@ export function claim(board: Board, from: number, to: number): void {
 }
 
 /** Writes a finding and claims its terms. */
-export function find<F extends FieldName>(board: Board, field: F, value: NonNullable<Fields[F]>, said: Said, from: number, to: number): void {
+export function find<F extends FieldName>(
+  board: Board,
+  field: F,
+  value: NonNullable<Fields[F]>,
+  said: Said,
+  from: number,
+  to: number,
+): void {
   board.findings.push({ field, value, said, from, to } as Finding);
   claim(board, from, to);
 }
@@ -97,7 +106,8 @@ export function setAside(board: Board, from: number, to: number): void {
 }
 
 /** Whether a field was found. */
-export const isFound = (board: Board, field: FieldName): boolean => board.findings.some((finding) => finding.field === field);
+export const isFound = (board: Board, field: FieldName): boolean =>
+  board.findings.some((finding) => finding.field === field);
 
 /** The first finding of a field. */
 export const findingOf = <F extends FieldName>(board: Board, field: F): Finding<F> | undefined =>
@@ -114,7 +124,12 @@ export interface Figure {
 const opensMinus = (board: Board, i: number): boolean => {
   const [sign, figure, before] = [board.terms[i - 1], board.terms[i], board.terms[i - 2]];
   if (sign?.kind !== 'mark' || sign.text !== '-' || figure?.gap !== false) return false;
-  return sign.gap || before === undefined || before.kind === 'break' || (before.kind === 'mark' && before.text !== ')');
+  return (
+    sign.gap ||
+    before === undefined ||
+    before.kind === 'break' ||
+    (before.kind === 'mark' && before.text !== ')')
+  );
 };
 
 /** Reads numeral `i` with its sign, as a figure whose thousands may be grouped. */
@@ -122,7 +137,8 @@ export function figureAt(board: Board, i: number): Figure {
   const term = board.terms[i];
   if (term?.kind !== 'number') return { value: Number.NaN, unsure: false, from: i };
   const minus = opensMinus(board, i);
-  const read = term.value === undefined ? readNumeral(term.text, board.grouping) : { value: term.value, unsure: false };
+  const read =
+    term.value === undefined ? readNumeral(term.text, board.grouping) : { value: term.value, unsure: false };
   return { value: minus ? -read.value : read.value, unsure: read.unsure, from: minus ? i - 1 : i };
 }
 

@@ -15,30 +15,55 @@ interface Hit {
 
 type Hits = ReadonlyMap<DangerId, readonly Hit[]>;
 
-/** Words of one language by their first word, so that a message is looked through once. */
-type Index = ReadonlyMap<string, readonly { readonly words: readonly string[]; readonly id: DangerId }[]>;
+/** A phrase of one language that belongs to a group. */
+interface Phrase {
+  readonly language: Language;
+  readonly words: readonly string[];
+  readonly id: DangerId;
+}
 
-function indexOf({ danger }: Words): Index {
-  const index = new Map<string, { words: readonly string[]; id: DangerId }[]>();
-  for (const [id, phrases] of Object.entries(danger) as [DangerId, readonly string[]][]) {
-    for (const phrase of phrases) {
-      const words = phrase.split(' ');
-      index.set(words[0]!, [...(index.get(words[0]!) ?? []), { words, id }]);
+/** The phrases of all languages by their first word, so that a message is looked through once. */
+function indexOf(lists: readonly Words[]): ReadonlyMap<string, readonly Phrase[]> {
+  const index = new Map<string, Phrase[]>();
+  for (const { language, danger } of lists) {
+    for (const [id, phrases] of Object.entries(danger) as [DangerId, readonly string[]][]) {
+      for (const phrase of phrases) {
+        const words = phrase.split(' ');
+        const same = index.get(words[0]!) ?? [];
+        same.push({ language, words, id });
+        index.set(words[0]!, same);
+      }
     }
   }
   return index;
 }
 
-const INDICES: readonly (readonly [Language, Index])[] = [en, es, fr, it, de, pt].map((words) => [words.language, indexOf(words)]);
+const INDEX = indexOf([en, es, fr, it, de, pt]);
 
-function hitsIn(words: readonly string[], index: Index): Hits {
-  const hits = new Map<DangerId, Hit[]>();
+/** The groups that make an emergency or open one; without any of them nothing further is looked at. */
+const OPENERS: ReadonlySet<DangerId> = new Set<DangerId>([
+  'down',
+  'breathless',
+  'hurt-eye',
+  'swallowed',
+  'drank',
+  'burnt',
+  'leak',
+  'alarm',
+  'fell',
+  'silent',
+]);
+
+function hitsByLanguage(words: readonly string[]): Map<Language, Map<DangerId, Hit[]>> {
+  const found = new Map<Language, Map<DangerId, Hit[]>>();
   for (let i = 0; i < words.length; i++) {
-    for (const { words: phrase, id } of index.get(words[i]!) ?? []) {
-      if (phrase.every((word, k) => words[i + k] === word)) hits.set(id, [...(hits.get(id) ?? []), { from: i, to: i + phrase.length - 1 }]);
+    for (const { language, words: phrase, id } of INDEX.get(words[i]!) ?? []) {
+      if (!phrase.every((word, k) => words[i + k] === word)) continue;
+      const hits = found.get(language) ?? new Map<DangerId, Hit[]>();
+      found.set(language, hits.set(id, [...(hits.get(id) ?? []), { from: i, to: i + phrase.length - 1 }]));
     }
   }
-  return hits;
+  return found;
 }
 
 const all = (hits: Hits, id: DangerId): readonly Hit[] => hits.get(id) ?? [];
@@ -46,7 +71,8 @@ const has = (hits: Hits, id: DangerId): boolean => hits.has(id);
 
 /** Whether what fell or cannot breathe is a thing named up to three words before: `foam collapsed`. */
 function isThing(hits: Hits, words: readonly string[], { from }: Hit): boolean {
-  const isBeside = (at: number): boolean => all(hits, 'beside').some((hit) => hit.from < at && at - hit.from <= 2);
+  const isBeside = (at: number): boolean =>
+    all(hits, 'beside').some((hit) => hit.from < at && at - hit.from <= 2);
   const near = (at: number): boolean => at < from && from - at <= 3 && !isBeside(at);
   const person = all(hits, 'person').some((hit) => hit.to < from && from - hit.to <= 3);
   const vessel = words.some((word, at) => near(at) && /^(t|fv|b)?\d+$/.test(word));
@@ -55,16 +81,27 @@ function isThing(hits: Hits, words: readonly string[], { from }: Hit): boolean {
 
 /** A gas and a leak within four words; free and total SO2 are no gas. */
 function isGasLeak(hits: Hits, words: readonly string[]): boolean {
-  const gases = all(hits, 'gas').filter(({ from }) => !['free', 'total', 'libre', 'livre', 'libera', 'mol', 'molecular'].includes(words[from - 1] ?? ''));
+  const gases = all(hits, 'gas').filter(
+    ({ from }) =>
+      !['free', 'total', 'libre', 'livre', 'libera', 'mol', 'molecular'].includes(words[from - 1] ?? ''),
+  );
   return gases.some((gas) => all(hits, 'leak').some((leak) => Math.abs(leak.from - gas.from) <= 5));
 }
 
 /** `he dropped a hose, it fell into the tank`: a thing stands between the person and the fall. */
 const isDropped = (hits: Hits): boolean =>
-  all(hits, 'fell').every((fall) => all(hits, 'thing').some((thing) => thing.to < fall.from && all(hits, 'person').every((person) => person.to < thing.from || person.from > fall.to)));
+  all(hits, 'fell').every((fall) =>
+    all(hits, 'thing').some(
+      (thing) =>
+        thing.to < fall.from &&
+        all(hits, 'person').every((person) => person.to < thing.from || person.from > fall.to),
+    ),
+  );
 
 function isDanger(hits: Hits, words: readonly string[]): boolean {
-  const person = (['down', 'breathless'] as const).some((id) => all(hits, id).some((hit) => !isThing(hits, words, hit)));
+  const person = (['down', 'breathless'] as const).some((id) =>
+    all(hits, id).some((hit) => !isThing(hits, words, hit)),
+  );
   if (person) return true;
   if (all(hits, 'hurt-eye').some(({ to }) => !(words[to] === 'eyes' && words[to + 1] === 'of'))) return true;
   if (all(hits, 'swallowed').some((hit) => !isThing(hits, words, hit))) return true;
@@ -75,7 +112,10 @@ function isDanger(hits: Hits, words: readonly string[]): boolean {
   const inside = all(hits, 'went-in').some((hit) => !isThing(hits, words, hit));
   if (has(hits, 'fell') && has(hits, 'person') && vessel && !isDropped(hits)) return true;
   if (!has(hits, 'silent')) return false;
-  return (inside && (has(hits, 'person') || !has(hits, 'elsewhere'))) || (has(hits, 'person') && vessel && !has(hits, 'elsewhere'));
+  return (
+    (inside && (has(hits, 'person') || !has(hits, 'elsewhere'))) ||
+    (has(hits, 'person') && vessel && !has(hits, 'elsewhere'))
+  );
 }
 
 /**
@@ -94,6 +134,8 @@ function isDanger(hits: Hits, words: readonly string[]): boolean {
 export function recogniseEmergency(text: string, chat: Language): Language | undefined {
   const words = text.match(/[\p{L}\d]+(?:'\p{L}+)*/gu);
   if (!words) return undefined;
-  const ordered = INDICES.toSorted(([a], [b]) => Number(b === chat) - Number(a === chat));
-  return ordered.find(([, index]) => isDanger(hitsIn(words, index), words))?.[0];
+  const found = hitsByLanguage(words);
+  const languages = [...found].filter(([, hits]) => [...hits.keys()].some((id) => OPENERS.has(id)));
+  const ordered = languages.toSorted(([a], [b]) => Number(b === chat) - Number(a === chat));
+  return ordered.find(([, hits]) => isDanger(hits, words))?.[0];
 }

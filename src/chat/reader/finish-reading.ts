@@ -3,7 +3,8 @@ import type { Target } from '../../core/wine.ts';
 import type { AskedField, Assumed, Draft, Fields, Reading, ReaderSettings } from './understood.ts';
 import { ASKED_FIELDS } from './understood.ts';
 
-const inOrder = (asks: ReadonlySet<AskedField>): AskedField[] => ASKED_FIELDS.filter((field) => asks.has(field));
+const inOrder = (asks: ReadonlySet<AskedField>): AskedField[] =>
+  ASKED_FIELDS.filter((field) => asks.has(field));
 
 const hasNoUsualTarget = ({ category, alcohol_percent }: Fields): boolean =>
   category === 'sparkling' || category === 'fortified' || (alcohol_percent ?? 0) >= 17;
@@ -28,7 +29,8 @@ function askAdditive({ marks }: Draft, fields: Fields, asks: Set<AskedField>): v
 
 /** Litres that may be assumed: barrels without a size, by count or by number. */
 function assumedVolume({ intent, marks }: Draft, fields: Fields): number | undefined {
-  if (fields.volume_L !== undefined || marks.fruitByWeight || marks.castsWithoutSize || marks.eachOrTotal) return undefined;
+  if (fields.volume_L !== undefined || marks.fruitByWeight || marks.castsWithoutSize || marks.eachOrTotal)
+    return undefined;
   if (intent === 'reading' || (intent === 'added' && !marks.barrelsCounted)) return undefined;
   return marks.barrelsAssumed_L;
 }
@@ -37,7 +39,11 @@ const isAmount = (fields: Fields): boolean =>
   fields.mass_g !== undefined || fields.additive_volume_mL !== undefined || fields.tablets !== undefined;
 
 /** Fills in what is usual and lists what is missing, by intent. */
-function work(draft: Draft, fields: Fields, settings: ReaderSettings): { assumed: Assumed; asks: Set<AskedField> } {
+function work(
+  draft: Draft,
+  fields: Fields,
+  settings: ReaderSettings,
+): { assumed: Assumed; asks: Set<AskedField> } {
   const { intent, marks } = draft;
   const asks = new Set<AskedField>();
   const volume_L = assumedVolume(draft, fields);
@@ -58,10 +64,20 @@ function work(draft: Draft, fields: Fields, settings: ReaderSettings): { assumed
       if (fields.free_mg_L === undefined) asks.add('free_mg_L');
     }
     askAdditive(draft, fields, asks);
-    const target = bare || fields.target !== undefined ? undefined : hasNoUsualTarget(fields) ? 'ask' : usualTarget(fields, settings);
+    const target =
+      bare || fields.target !== undefined
+        ? undefined
+        : hasNoUsualTarget(fields)
+          ? 'ask'
+          : usualTarget(fields, settings);
     if (target === 'ask') asks.add('target');
     return {
-      assumed: { ...additive, ...(target === undefined || target === 'ask' ? {} : { target }), ...(fields.stage === undefined ? { stage: 'finished' as const } : {}), ...base },
+      assumed: {
+        ...additive,
+        ...(target === undefined || target === 'ask' ? {} : { target }),
+        ...(fields.stage === undefined ? { stage: 'finished' as const } : {}),
+        ...base,
+      },
       asks,
     };
   }
@@ -69,12 +85,20 @@ function work(draft: Draft, fields: Fields, settings: ReaderSettings): { assumed
     if (unknownVolume && (fields.rate_mg_L === undefined || marks.fruitByWeight)) asks.add('volume_L');
     if (!isAmount(fields) && fields.rate_mg_L === undefined && !marks.fruitByWeight) asks.add('mass_g');
     askAdditive(draft, fields, asks);
-    return { assumed: { ...additive, ...(fields.stage === undefined ? { stage: 'finished' as const } : {}), ...base }, asks };
+    return {
+      assumed: {
+        ...additive,
+        ...(fields.stage === undefined ? { stage: 'finished' as const } : {}),
+        ...base,
+      },
+      asks,
+    };
   }
   if (intent === 'added') {
     if (vesselless) asks.add('vessel');
     if (fields.added_mg_L !== undefined && unknownVolume) asks.add('volume_L');
-    if (!isAmount(fields) && fields.added_mg_L === undefined && fields.rate_mg_L === undefined) asks.add('mass_g');
+    if (!isAmount(fields) && fields.added_mg_L === undefined && fields.rate_mg_L === undefined)
+      asks.add('mass_g');
     if (fields.rate_mg_L !== undefined && unknownVolume) asks.add('volume_L');
     return { assumed: { ...additive, ...base }, asks };
   }
@@ -85,7 +109,8 @@ function work(draft: Draft, fields: Fields, settings: ReaderSettings): { assumed
   if (intent === 'solution') {
     if (unknownVolume) asks.add('volume_L');
     if (marks.unnamedAdditive && fields.additive === undefined) asks.add('additive');
-    if (marks.solutionUse !== 'holding' && fields.strength_percent === undefined && !isAmount(fields)) asks.add('strength_percent');
+    if (marks.solutionUse !== 'holding' && fields.strength_percent === undefined && !isAmount(fields))
+      asks.add('strength_percent');
     return { assumed: { ...additive, ...base }, asks };
   }
   return { assumed: {}, asks };

@@ -50,7 +50,11 @@ const isInvisible = (code: number): boolean =>
   (code >= 0xfe00 && code <= 0xfe0f);
 
 const isBlank = (code: number): boolean =>
-  code === 0xa0 || code === 0x202f || code === 0x3000 || code === 0x1680 || (code >= 0x2000 && code <= 0x200a);
+  code === 0xa0 ||
+  code === 0x202f ||
+  code === 0x3000 ||
+  code === 0x1680 ||
+  (code >= 0x2000 && code <= 0x200a);
 
 function plainOf(character: string, code: number): string {
   const known = PLAIN[character];
@@ -58,7 +62,10 @@ function plainOf(character: string, code: number): string {
   if (FRACTIONS.has(character)) return character;
   if (isInvisible(code)) return '';
   if (isBlank(code)) return ' ';
-  return character.normalize('NFKD').replace(/\p{M}+/gu, '').toLowerCase();
+  return character
+    .normalize('NFKD')
+    .replace(/\p{M}+/gu, '')
+    .toLowerCase();
 }
 
 /**
@@ -76,22 +83,23 @@ export function foldText(message: string): FoldedText {
   const at: number[] = [];
   const capital: boolean[] = [];
   let text = '';
-  for (let i = 0; i < message.length; ) {
+  for (let i = 0; i < message.length;) {
     const code = message.codePointAt(i) ?? 0;
     const size = code > 0xffff ? 2 : 1;
     const isCapital = code >= 65 && code <= 90;
     if (code < 128) {
       if (code === 13) {
-        if (message.charCodeAt(i + 1) !== 10) (text += '\n'), at.push(i), capital.push(false);
+        if (message.charCodeAt(i + 1) !== 10) ((text += '\n'), at.push(i), capital.push(false));
       } else {
-        const plain = code === 9 ? ' ' : code === 96 ? "'" : String.fromCharCode(isCapital ? code + 32 : code);
+        const plain =
+          code === 9 ? ' ' : code === 96 ? "'" : String.fromCharCode(isCapital ? code + 32 : code);
         text += plain;
         at.push(i);
         capital.push(isCapital);
       }
     } else {
       for (const plain of plainOf(message.slice(i, i + size), code)) {
-        for (let k = 0; k < plain.length; k++) at.push(i), capital.push(false);
+        for (let k = 0; k < plain.length; k++) (at.push(i), capital.push(false));
         text += plain;
       }
     }

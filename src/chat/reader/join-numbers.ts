@@ -1,8 +1,10 @@
 import type { Term } from './split-terms.ts';
 
 const DENOMINATORS = new Set([2, 3, 4, 8, 16]);
-const isWhole = (term: Term | undefined): boolean => term?.kind === 'number' && term.value === undefined && /^\d+$/.test(term.text);
-const has = (term: Term | undefined, pattern: RegExp): boolean => term?.tags.some((tag) => pattern.test(tag)) === true;
+const isWhole = (term: Term | undefined): boolean =>
+  term?.kind === 'number' && term.value === undefined && /^\d+$/.test(term.text);
+const has = (term: Term | undefined, pattern: RegExp): boolean =>
+  term?.tags.some((tag) => pattern.test(tag)) === true;
 
 const FRACTION_OF = /^(unit:(?!none|ppm|mg\/L|C$|F$|degree)|cue:tablet|additive:campden)/;
 
@@ -27,7 +29,14 @@ function joinFractions(terms: readonly Term[]): Term[] {
     const vulgar = a.kind === 'number' && a.value !== undefined && a.value < 1;
     const [n, d] = [Number(a.text), Number(b?.text)];
     const plain =
-      isWhole(a) && slash?.text === '/' && !slash.gap && isWhole(b) && b?.gap === false && DENOMINATORS.has(d) && n > 0 && n < d;
+      isWhole(a) &&
+      slash?.text === '/' &&
+      !slash.gap &&
+      isWhole(b) &&
+      b?.gap === false &&
+      DENOMINATORS.has(d) &&
+      n > 0 &&
+      n < d;
     if (!(vulgar || (plain && terms[i + 3]?.text !== '/' && isOfSomething(terms, i + 3)))) {
       out.push(a);
       continue;
@@ -35,7 +44,13 @@ function joinFractions(terms: readonly Term[]): Term[] {
     const last = plain ? b! : a;
     const share = plain ? n / d : a.value!;
     const whole = out.at(-1);
-    if (whole && isWhole(whole) && (vulgar || a.gap) && Number(whole.text) < 1000 && out.at(-2)?.text !== '/') {
+    if (
+      whole &&
+      isWhole(whole) &&
+      (vulgar || a.gap) &&
+      Number(whole.text) < 1000 &&
+      out.at(-2)?.text !== '/'
+    ) {
       out[out.length - 1] = joined(whole, last, Number(whole.text) + share, `${whole.text} ${a.text}`);
     } else out.push(joined(a, last, share, a.text));
     if (plain) i += 2;
@@ -43,18 +58,28 @@ function joinFractions(terms: readonly Term[]): Term[] {
   return out;
 }
 
-const CLAIMS_NEXT = /^(label:(?!volume)|vessel:|cue:(target|to|add|raise|lot|molecular|from)$|stage:|unit:none)/;
+const CLAIMS_NEXT =
+  /^(label:(?!volume)|vessel:|cue:(target|to|add|raise|lot|molecular|from)$|stage:|unit:none)/;
 
 /** Whether the number after term `i` is claimed by a label or vessel word before it. */
 function isClaimedBefore(terms: readonly Term[], i: number): boolean {
   let k = i;
-  while (k >= 0 && (terms[k]!.text === ':' || terms[k]!.text === '=' || terms[k]!.text === '#' || (has(terms[k], /^cue:is$/) && !has(terms[k], CLAIMS_NEXT)))) k--;
+  while (
+    k >= 0 &&
+    (terms[k]!.text === ':' ||
+      terms[k]!.text === '=' ||
+      terms[k]!.text === '#' ||
+      (has(terms[k], /^cue:is$/) && !has(terms[k], CLAIMS_NEXT)))
+  )
+    k--;
   return k >= 0 && has(terms[k], CLAIMS_NEXT);
 }
 
 /** `T8 900 gal`: the 8 is the vessel's, or the label's that it is glued to. */
 const isGluedToWord = (terms: readonly Term[], i: number): boolean =>
-  terms[i]!.gap === false && (terms[i - 1]?.kind === 'word' || (terms[i - 1]?.text === '-' && terms[i - 1]!.gap === false)) || terms[i - 1]?.text === '/';
+  (terms[i]!.gap === false &&
+    (terms[i - 1]?.kind === 'word' || (terms[i - 1]?.text === '-' && terms[i - 1]!.gap === false))) ||
+  terms[i - 1]?.text === '/';
 
 const unitFollows = (terms: readonly Term[], i: number): boolean =>
   has(terms[i], /^unit:(L|hL|m3|gal|galUS|galUK|mL|g|kg|lb)$/) || has(terms[i], /^cue:thousand$/);
@@ -64,7 +89,14 @@ function hasOtherFree(terms: readonly Term[], from: number, to: number): boolean
   if (terms.some((term) => has(term, /^label:(free|so2)$|^unit:ppm$|^cue:(target|add)$/))) return true;
   return terms.some(
     (term, k) =>
-      (k < from || k > to) && isWhole(term) && term.gap && !unitFollows(terms, k + 1) && !isClaimedBefore(terms, k - 1) && terms[k + 1]?.text !== '%',
+      (k < from || k > to) &&
+      isWhole(term) &&
+      Number(term.text) <= 60 &&
+      term.gap &&
+      terms[k - 1]?.text !== "'" &&
+      !unitFollows(terms, k + 1) &&
+      !isClaimedBefore(terms, k - 1) &&
+      terms[k + 1]?.text !== '%',
   );
 }
 
@@ -75,17 +107,34 @@ function joinBlankGroups(terms: readonly Term[]): Term[] {
     const first = terms[i]!;
     let last = i;
     if (isWhole(first) && first.text.length <= 3 && !first.text.startsWith('0')) {
-      while (terms[last + 1]?.kind === 'number' && terms[last + 1]!.gap && /^\d{3}([.,]\d{1,2})?$/.test(terms[last + 1]!.text)) last++;
+      while (
+        terms[last + 1]?.kind === 'number' &&
+        terms[last + 1]!.gap &&
+        /^\d{3}([.,]\d{1,2})?$/.test(terms[last + 1]!.text)
+      )
+        last++;
     }
-    if (last === i || !unitFollows(terms, last + 1) || isClaimedBefore(terms, i - 1) || isGluedToWord(terms, i)) {
+    if (
+      last === i ||
+      !unitFollows(terms, last + 1) ||
+      isClaimedBefore(terms, i - 1) ||
+      isGluedToWord(terms, i)
+    ) {
       out.push(first);
       continue;
     }
     const before = terms[i - 1];
     const unsure = before?.kind === 'number' && first.text.length > 1 && !hasOtherFree(terms, i, last);
-    const text = terms.slice(i, last + 1).map((term) => term.text).join('');
+    const text = terms
+      .slice(i, last + 1)
+      .map((term) => term.text)
+      .join('');
     const end = terms[last]!.end;
-    out.push(unsure ? { ...first, text: `${text}?`, end, value: Number.NaN } : { ...first, text: text.replace(',', '.'), end, value: Number(text.replace(',', '.')) });
+    out.push(
+      unsure
+        ? { ...first, text: `${text}?`, end, value: Number.NaN }
+        : { ...first, text: text.replace(',', '.'), end, value: Number(text.replace(',', '.')) },
+    );
     i = last;
   }
   return out;

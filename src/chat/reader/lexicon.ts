@@ -21,7 +21,8 @@ export interface Lexicon {
   readonly groups: ReadonlyMap<Language, string>;
 }
 
-const MENDABLE = /^(label|cue:target|cue:molecular|cue:binding|additive|unit:gal|unit:L|vessel|category|organic)/;
+const MENDABLE =
+  /^(label|cue:target|cue:molecular|cue:binding|additive|unit:gal|unit:L|vessel|category|organic)/;
 
 /**
  * Builds the lexicon from word lists; done once, when the module loads.
@@ -53,7 +54,10 @@ export function buildLexicon(lists: readonly Words[]): Lexicon {
   for (const [phrase, { tags }] of phrases) {
     if (!phrase.includes(' ') && /\d/.test(phrase)) {
       const same = formulas.get(phrase[0] ?? '') ?? [];
-      formulas.set(phrase[0] ?? '', [...same, phrase].toSorted((a, b) => b.length - a.length));
+      formulas.set(
+        phrase[0] ?? '',
+        [...same, phrase].toSorted((a, b) => b.length - a.length),
+      );
     }
     if (/^[a-z]{4,}$/.test(phrase) && tags.some((tag) => MENDABLE.test(tag))) {
       mendable.set(phrase[0] ?? '', [...(mendable.get(phrase[0] ?? '') ?? []), phrase]);

@@ -27,7 +27,11 @@ function isOneSlip(a: string, b: string): boolean {
 }
 
 /** Whether two letters beside each other changed places: the only slip mended in a short word. */
-const isSwapped = (a: string, b: string): boolean => a.length === b.length && a !== b && [...a].toSorted().join() === [...b].toSorted().join() && isOneSlip(a, b);
+const isSwapped = (a: string, b: string): boolean =>
+  a.length === b.length &&
+  a !== b &&
+  [...a].toSorted().join() === [...b].toSorted().join() &&
+  isOneSlip(a, b);
 
 /**
  * Mends a misspelt word, but only where it can be one word alone, and never across a chemical border.
@@ -45,8 +49,15 @@ export function mendWord(word: string, lexicon: Lexicon): string | undefined {
   if (word.length < 4 || word.length > 24 || NEVER.has(word) || lexicon.phrases.has(word)) return undefined;
   let found: string | undefined;
   for (const candidate of lexicon.mendable.get(word[0] ?? '') ?? []) {
-    if (word.length === 4 ? candidate.length !== 4 || !isSwapped(word, candidate) : !isOneSlip(word, candidate)) continue;
-    if (found !== undefined && lexicon.phrases.get(found)?.tags[0] !== lexicon.phrases.get(candidate)?.tags[0]) return undefined;
+    if (
+      word.length === 4 ? candidate.length !== 4 || !isSwapped(word, candidate) : !isOneSlip(word, candidate)
+    )
+      continue;
+    if (
+      found !== undefined &&
+      lexicon.phrases.get(found)?.tags[0] !== lexicon.phrases.get(candidate)?.tags[0]
+    )
+      return undefined;
     found ??= candidate;
   }
   return found;

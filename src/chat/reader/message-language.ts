@@ -8,15 +8,22 @@ import type { Grouping } from './numbers.ts';
 import type { Term } from './split-terms.ts';
 import type { Language } from './understood.ts';
 
-const GROUPS = new Map<Language, string>([en, es, fr, it, de, pt].map(({ language, groups }) => [language, groups]));
+const GROUPS = new Map<Language, string>(
+  [en, es, fr, it, de, pt].map(({ language, groups }) => [language, groups]),
+);
 
 /** Words that are the same in most languages and tell none. */
 const INTERNATIONAL = new Set(['ppm', 'kmbs', 'so2', 'tank', 'total', 'bio', 'organic', 'merlot', 'mol', 'lot', 'vol', 'alc', 'dep', 'cuve', 'vasca', 'cuba', 'deposito', 'barrique', 'barrica']); // prettier-ignore
 
 const tellsEnglish = ({ kind, text, tags }: Term): boolean =>
-  kind === 'word' && text.length >= 3 && tags.length > 0 && !INTERNATIONAL.has(text) && !tags.some((tag) => tag === 'cue:variety' || tag.startsWith('additive'));
+  kind === 'word' &&
+  text.length >= 3 &&
+  tags.length > 0 &&
+  !INTERNATIONAL.has(text) &&
+  !tags.some((tag) => tag === 'cue:variety' || tag.startsWith('additive'));
 
-const isForeign = ({ kind, text, tags }: Term): boolean => kind === 'word' && text.length >= 3 && tags.length === 0;
+const isForeign = ({ kind, text, tags }: Term): boolean =>
+  kind === 'word' && text.length >= 3 && tags.length === 0;
 
 /**
  * Which separators group thousands: only those that the chat's and the message's language agree on.

@@ -40,7 +40,9 @@ export function readNumeral(raw: string, grouping: Grouping): Numeral {
   if (kinds > 1) return { value: asNumber(whole, decimals), unsure: kinds > 2 };
   if (marks.length > 1) return { value: grouped, unsure: !/^\d{1,3}(\D\d{3})+$/.test(text) };
   if (last === "'") {
-    return decimals.length === 3 ? { value: grouped, unsure: false } : { value: asNumber(whole, decimals), unsure: false };
+    return decimals.length === 3
+      ? { value: grouped, unsure: false }
+      : { value: asNumber(whole, decimals), unsure: false };
   }
   if (decimals.length !== 3 || whole === '' || whole.startsWith('0') || whole.length > 3) {
     return { value: asNumber(whole, decimals), unsure: false };

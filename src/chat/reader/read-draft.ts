@@ -71,7 +71,12 @@ function shareVolume(board: Board, fields: Record<string, unknown>): void {
       board.marks.barrelsAssumed_L = vessels.length * USUAL_BARREL_L;
       board.marks.barrelsCounted = true;
     }
-  } else if (!board.marks.statedTotal && (board.marks.statedEach || holdsCue(board, 'each') || (isBarrels && volume <= 700 && !holdsCue(board, 'altogether')))) {
+  } else if (
+    !board.marks.statedTotal &&
+    (board.marks.statedEach ||
+      holdsCue(board, 'each') ||
+      (isBarrels && volume <= 700 && !holdsCue(board, 'altogether')))
+  ) {
     fields['volume_L'] = volume * vessels.length;
     board.notes.push({ id: 'each-or-total', text: `${volume} L` });
   } else if (!board.marks.statedTotal && !holdsCue(board, 'altogether')) {
@@ -86,13 +91,16 @@ function shareVolume(board: Board, fields: Record<string, unknown>): void {
 /** One numbered barrel without a size counts as a usual one. */
 function assumeBarrel(board: Board): void {
   const vessel = findingOf(board, 'vessel')?.value;
-  if (vessel?.startsWith('barrel ') && !isFound(board, 'volume_L') && !board.marks.castsWithoutSize) board.marks.barrelsAssumed_L ??= USUAL_BARREL_L;
+  if (vessel?.startsWith('barrel ') && !isFound(board, 'volume_L') && !board.marks.castsWithoutSize)
+    board.marks.barrelsAssumed_L ??= USUAL_BARREL_L;
 }
 
 function fieldsOf(board: Board): Fields {
   const fields: Record<string, unknown> = {};
   for (const { field, value } of board.findings) if (field !== 'stage') fields[field] ??= value;
-  const stages = board.findings.filter((finding): finding is Finding<'stage'> => finding.field === 'stage').map(({ value }) => value as Stage);
+  const stages = board.findings
+    .filter((finding): finding is Finding<'stage'> => finding.field === 'stage')
+    .map(({ value }) => value as Stage);
   const stage = mostCautious(stages);
   if (stage) fields['stage'] = stage;
   shareVolume(board, fields);
@@ -108,7 +116,13 @@ function placesOf(board: Board): Partial<Record<FieldName, Place>> {
 /** A weight of fruit named with a cask mark but taken by a vessel word. */
 function noteCask(board: Board): void {
   const named = findingOf(board, 'vessel');
-  if (named && board.terms.slice(named.from, named.to + 1).some((_, k) => board.terms[named.from + k]!.tags.includes('vessel:cask'))) board.marks.castsWithoutSize = true;
+  if (
+    named &&
+    board.terms
+      .slice(named.from, named.to + 1)
+      .some((_, k) => board.terms[named.from + k]!.tags.includes('vessel:cask'))
+  )
+    board.marks.castsWithoutSize = true;
 }
 
 /**
@@ -122,7 +136,8 @@ export function readDraft(board: Board): Draft {
   assumeBarrel(board);
   const intent = decideIntent(board);
   const fields = fieldsOf(board);
-  if (intent === 'dose' && isFound(board, 'mass_g')) board.notes.push({ id: 'mass-beside-readings', text: '' });
+  if (intent === 'dose' && isFound(board, 'mass_g'))
+    board.notes.push({ id: 'mass-beside-readings', text: '' });
   if (board.marks.fruitByWeight) board.notes.push({ id: 'fruit-by-weight', text: '' });
   const { strengthAsSalt, volumeUnit, containers, concentrationUnit } = board.marks;
   return {
@@ -139,4 +154,3 @@ export function readDraft(board: Board): Draft {
     ...(concentrationUnit && { concentrationUnit }),
   };
 }
-

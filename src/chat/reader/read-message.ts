@@ -35,7 +35,12 @@ function cuesOf(terms: readonly Term[]): ReadonlySet<Tag> {
 }
 
 /** A fresh table for some terms of a message. */
-export function setBoard(message: string, folded: FoldedText, terms: readonly Term[], settings: ReaderSettings): Board {
+export function setBoard(
+  message: string,
+  folded: FoldedText,
+  terms: readonly Term[],
+  settings: ReaderSettings,
+): Board {
   return {
     message,
     folded,
@@ -71,7 +76,8 @@ function readOne(board: Board, settings: ReaderSettings): Reading {
   if (draft.intent !== 'chat') return finishReading(draft, settings);
   const topic = topicOf(board);
   if (topic !== undefined) return empty('chat', { topic });
-  const problems = isStrange(board) ? [{ code: 'not-understood' as const, about: '' }] : [];
+  const problems =
+    isStrange(board) && board.findings.length === 0 ? [{ code: 'not-understood' as const, about: '' }] : [];
   return empty('chat', { problems, notes: draft.notes });
 }
 
@@ -90,10 +96,16 @@ function readOne(board: Board, settings: ReaderSettings): Reading {
  */
 export function readMessage(text: string, settings: ReaderSettings, waiting?: Waiting): Understood {
   const decimalMark = /\d,\d{1,2}(?!\d)/.test(text) && !/\d\.\d/.test(text) ? ',' : '.';
-  const understood = (readings: readonly Reading[], shared = {}, language = settings.language): Understood => ({ readings, shared, language, decimalMark });
+  const understood = (
+    readings: readonly Reading[],
+    shared = {},
+    language = settings.language,
+  ): Understood => ({ readings, shared, language, decimalMark });
   if (text.length > LONGEST_MESSAGE) {
     const danger = recogniseEmergency(foldText(text.slice(0, LONGEST_MESSAGE)).text, settings.language);
-    return danger ? understood([empty('emergency')], {}, danger) : understood([empty('chat', { problems: [{ code: 'too-long', about: '' }] })]);
+    return danger
+      ? understood([empty('emergency')], {}, danger)
+      : understood([empty('chat', { problems: [{ code: 'too-long', about: '' }] })]);
   }
   const folded = foldText(text);
   const danger = recogniseEmergency(folded.text, settings.language);
@@ -102,7 +114,10 @@ export function readMessage(text: string, settings: ReaderSettings, waiting?: Wa
   if (answer) return understood([answer]);
   const terms = joinNumbers(splitTerms(folded, LEXICON));
   const lines = linesOf(terms);
-  const round = lines.length > 1 ? readRound(lines, (line) => setBoard(text, folded, line, settings), settings) : undefined;
+  const round =
+    lines.length > 1
+      ? readRound(lines, (line) => setBoard(text, folded, line, settings), settings)
+      : undefined;
   if (round) return understood(round.readings, round.shared);
   return understood([readOne(setBoard(text, folded, terms, settings), settings)]);
 }

@@ -33,7 +33,10 @@ function readLine(terms: readonly Term[], setBoard: SetBoard): LineRead {
     terms,
     draft,
     vessel: vessel ?? vessels?.join(),
-    hasVolume: says('volume_L') || board.marks.barrelsCounted === true || board.problems.some(({ code }) => code === 'volume-not-positive'),
+    hasVolume:
+      says('volume_L') ||
+      board.marks.barrelsCounted === true ||
+      board.problems.some(({ code }) => code === 'volume-not-positive'),
     isPastWord: board.pastTense && draft.intent === 'chat',
     leftover: draft.intent === 'chat' && terms.some((_, i) => isFree(board, i)),
   };
@@ -46,9 +49,18 @@ function isRound(lines: readonly LineRead[]): boolean {
   return vessels.length >= 2 || lines.filter(({ hasVolume }) => hasVolume).length >= 2;
 }
 
-const NOT_UNDERSTOOD: Draft = { intent: 'chat', fields: {}, problems: [{ code: 'not-understood', about: '' }], setAside: [], notes: [], marks: {}, where: {} };
+const NOT_UNDERSTOOD: Draft = {
+  intent: 'chat',
+  fields: {},
+  problems: [{ code: 'not-understood', about: '' }],
+  setAside: [],
+  notes: [],
+  marks: {},
+  where: {},
+};
 
-const carriesFacts = ({ draft }: LineRead): boolean => Object.keys(draft.fields).length > 0 || Object.keys(draft.marks).length > 0;
+const carriesFacts = ({ draft }: LineRead): boolean =>
+  Object.keys(draft.fields).length > 0 || Object.keys(draft.marks).length > 0;
 
 /** Facts of the first line: what a reading does not say itself it takes from here. */
 function withShared(draft: Draft, shared: Draft | undefined): Draft {
@@ -68,26 +80,37 @@ function assumePast(board: Board): Board {
  * @param setBoard Makes a fresh table for some terms.
  * @returns The round, or undefined where the lines are one message.
  */
-export function readRound(lines: readonly (readonly Term[])[], setBoard: SetBoard, settings: ReaderSettings): Round | undefined {
+export function readRound(
+  lines: readonly (readonly Term[])[],
+  setBoard: SetBoard,
+  settings: ReaderSettings,
+): Round | undefined {
   const read = lines.map((terms) => readLine(terms, setBoard));
   if (!isRound(read)) return undefined;
   const byVessel = read.filter(({ vessel }) => vessel !== undefined).length >= 2;
   const opens = (line: LineRead): boolean => (byVessel ? line.vessel !== undefined : line.hasVolume);
   const [first] = read as [LineRead];
   const past = first.isPastWord && !opens(first);
-  const shared = !opens(first) && !first.isPastWord && carriesFacts(first) && first.draft.problems.length === 0 ? first.draft : undefined;
+  const shared =
+    !opens(first) && !first.isPastWord && carriesFacts(first) && first.draft.problems.length === 0
+      ? first.draft
+      : undefined;
   const groups: (Term[] | undefined)[] = [];
   for (const line of read) {
     if (opens(line)) groups.push([...line.terms]);
     else if (line === first) continue;
-    else if (line.draft.intent !== 'chat' && groups.at(-1)) groups.at(-1)!.push({ ...line.terms[0]!, kind: 'break', text: '\n', tags: [] }, ...line.terms);
+    else if (line.draft.intent !== 'chat' && groups.at(-1))
+      groups.at(-1)!.push({ ...line.terms[0]!, kind: 'break', text: '\n', tags: [] }, ...line.terms);
     else if (line.leftover) groups.push(undefined);
   }
   const readings = groups.map((terms) => {
     if (!terms) return { ...NOT_UNDERSTOOD, assumed: {}, asks: [] };
     const board = setBoard(terms);
     const draft = withShared(readDraft(past ? assumePast(board) : board), shared);
-    const dose = draft.intent === 'chat' ? { ...draft, intent: 'dose' as const, ...(board.findings.length > 0 ? {} : {}) } : draft;
+    const dose =
+      draft.intent === 'chat'
+        ? { ...draft, intent: 'dose' as const, ...(board.findings.length > 0 ? {} : {}) }
+        : draft;
     return finishReading(withIntent(dose, shared), settings, shared?.fields);
   });
   return { readings, shared: shared?.fields ?? {} };
@@ -95,5 +118,7 @@ export function readRound(lines: readonly (readonly Term[])[], setBoard: SetBoar
 
 /** A line that names only a vessel takes the wish of the first line. */
 function withIntent(draft: Draft, shared: Draft | undefined): Draft {
-  return shared && (shared.intent === 'reading' || shared.intent === 'added') && draft.intent === 'dose' ? { ...draft, intent: shared.intent } : draft;
+  return shared && (shared.intent === 'reading' || shared.intent === 'added') && draft.intent === 'dose'
+    ? { ...draft, intent: shared.intent }
+    : draft;
 }

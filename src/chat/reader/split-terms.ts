@@ -25,7 +25,8 @@ const VULGAR: Readonly<Record<string, number>> = {
 
 const NONE: readonly Tag[] = [];
 const isDigit = (c: string | undefined): boolean => c !== undefined && c >= '0' && c <= '9';
-const isLetter = (c: string | undefined): boolean => c !== undefined && (c >= 'a' && c <= 'z' ? true : c > '\u00bf' && /\p{L}/u.test(c));
+const isLetter = (c: string | undefined): boolean =>
+  c !== undefined && (c >= 'a' && c <= 'z' ? true : c > '\u00bf' && /\p{L}/u.test(c));
 
 function numeralEnd(text: string, from: number): number {
   let i = from;
@@ -53,7 +54,9 @@ function unglue(word: string, lexicon: Lexicon): readonly string[] | undefined {
   for (let cut = 1; cut < word.length; cut++) {
     const [left, right] = [word.slice(0, cut), word.slice(cut)];
     const fits = (part: string): boolean =>
-      (lexicon.phrases.get(part)?.tags ?? NONE).some((tag) => /^(unit:(?!none)|label|additive|cue:(target|add|molecular)$)/.test(tag));
+      (lexicon.phrases.get(part)?.tags ?? NONE).some((tag) =>
+        /^(unit:(?!none)|label|additive|cue:(target|add|molecular)$)/.test(tag),
+      );
     if (fits(left) && fits(right)) return [left, right];
   }
   return undefined;
@@ -66,15 +69,27 @@ function cut(folded: FoldedText, lexicon: Lexicon): Term[] {
   let gap = true;
   const push = (kind: Term['kind'], start: number, end: number, value?: number): void => {
     const capital = kind === 'word' && folded.capital[start] === true && folded.capital[end - 1] === true;
-    pieces.push({ kind, text: text.slice(start, end), start, end, gap, tags: NONE, capital, ...(value === undefined ? {} : { value }) });
+    pieces.push({
+      kind,
+      text: text.slice(start, end),
+      start,
+      end,
+      gap,
+      tags: NONE,
+      capital,
+      ...(value === undefined ? {} : { value }),
+    });
     gap = false;
   };
-  for (let i = 0; i < text.length; ) {
+  for (let i = 0; i < text.length;) {
     const c = text[i] ?? '';
     if (c === ' ') { gap = true; i++; continue; } // prettier-ignore
     if (c === '\n') { push('break', i, i + 1); gap = true; i++; continue; } // prettier-ignore
     let end = i + 1;
-    if (isDigit(c) || (c === '.' && isDigit(text[i + 1]) && !isDigit(text[i - 1]) && !isLetter(text[i - 1]))) {
+    if (
+      isDigit(c) ||
+      (c === '.' && isDigit(text[i + 1]) && !isDigit(text[i - 1]) && !isLetter(text[i - 1]))
+    ) {
       end = c === '.' ? numeralEnd(text, i + 1) : numeralEnd(text, i);
       push('number', i, end);
     } else if (VULGAR[c] !== undefined) {
@@ -83,7 +98,9 @@ function cut(folded: FoldedText, lexicon: Lexicon): Term[] {
       end = wordEnd(text, i, lexicon);
       const beside = isDigit(text[i - 1]) || isDigit(text[end]);
       const parts = beside ? unglue(text.slice(i, end), lexicon) : undefined;
-      if (parts) for (let at = i, k = 0; k < parts.length; at += parts[k++]!.length) push('word', at, at + parts[k]!.length);
+      if (parts)
+        for (let at = i, k = 0; k < parts.length; at += parts[k++]!.length)
+          push('word', at, at + parts[k]!.length);
       else push('word', i, end);
     } else if ((c === '-' || c === '=') && text[i + 1] === '>') {
       end = i + 2;
@@ -98,7 +115,11 @@ function cut(folded: FoldedText, lexicon: Lexicon): Term[] {
 }
 
 /** The longest known phrase that begins at piece `i`; words of a phrase have a blank or a hyphen between. */
-function phraseAt(pieces: readonly Term[], i: number, lexicon: Lexicon): { entry: Entry; next: number } | undefined {
+function phraseAt(
+  pieces: readonly Term[],
+  i: number,
+  lexicon: Lexicon,
+): { entry: Entry; next: number } | undefined {
   const first = pieces[i]!;
   const most = lexicon.longest.get(first.text) ?? 0;
   let text = '';
@@ -130,7 +151,7 @@ function phraseAt(pieces: readonly Term[], i: number, lexicon: Lexicon): { entry
 export function splitTerms(folded: FoldedText, lexicon: Lexicon): Term[] {
   const pieces = cut(folded, lexicon);
   const terms: Term[] = [];
-  for (let i = 0; i < pieces.length; ) {
+  for (let i = 0; i < pieces.length;) {
     const piece = pieces[i]!;
     const found = piece.kind === 'word' ? phraseAt(pieces, i, lexicon) : undefined;
     if (!found) {
@@ -140,7 +161,12 @@ export function splitTerms(folded: FoldedText, lexicon: Lexicon): Term[] {
       continue;
     }
     const last = pieces[found.next - 1]!;
-    terms.push({ ...piece, text: folded.text.slice(piece.start, last.end), end: last.end, tags: found.entry.tags });
+    terms.push({
+      ...piece,
+      text: folded.text.slice(piece.start, last.end),
+      end: last.end,
+      tags: found.entry.tags,
+    });
     i = found.next;
   }
   return terms;

@@ -5,15 +5,7 @@ import type { Category, Product, Stage, Style, Target } from '../../core/wine.ts
 export type Language = 'en' | 'es' | 'fr' | 'it' | 'de' | 'pt';
 
 export type Intent =
-  | 'dose'
-  | 'effect'
-  | 'added'
-  | 'reading'
-  | 'solution'
-  | 'titration'
-  | 'command'
-  | 'emergency'
-  | 'chat';
+  'dose' | 'effect' | 'added' | 'reading' | 'solution' | 'titration' | 'command' | 'emergency' | 'chat';
 
 /** What a message states, by the JSON names of the message language; volumes in litres, °C, mg/L. */
 export interface Fields {
@@ -116,6 +108,8 @@ export interface Marks {
   concentrationUnit?: 'ppm' | 'mg/L' | 'g/hL';
   /** A weight of fruit stood in the place of a volume. */
   fruitByWeight?: true;
+  /** An amount stood per weight of fruit (`7 g per 100 kg`). */
+  fruitRate?: true;
   /** The person wants to stop a fermentation. */
   stopsFerment?: true;
   /** A cask without a usual size was named. */

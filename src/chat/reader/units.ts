@@ -41,4 +41,9 @@ export function concentrationAt(board: Board, i: number): UnitAt | undefined {
 }
 
 /** How many mg/L one of that concentration is. */
-export const mg_L_IN: Readonly<Partial<Record<UnitId, number>>> = { ppm: 1, 'mg/L': 1, 'g/hL': 10, 'g/L': 1000 };
+export const mg_L_IN: Readonly<Partial<Record<UnitId, number>>> = {
+  ppm: 1,
+  'mg/L': 1,
+  'g/hL': 10,
+  'g/L': 1000,
+};

@@ -6,7 +6,12 @@ import type { Fields, Reading, ReaderSettings } from './understood.ts';
 const bare = /^([+-]?)(\d+(?:[.,']\d+)?|\d{1,3}(?: \d{3})+)\s*(%|g|ppm|mg\/l|l|ph)?[.!]?$/;
 
 /** The fields that a bare number means while the bot waits for one. */
-function fieldsFor(field: Waiting['field'], value: number, unit: string | undefined, settings: ReaderSettings): Fields | undefined {
+function fieldsFor(
+  field: Waiting['field'],
+  value: number,
+  unit: string | undefined,
+  settings: ReaderSettings,
+): Fields | undefined {
   const asked = (allowed: readonly (string | undefined)[]): boolean => allowed.includes(unit);
   switch (field) {
     case 'volume_L':
@@ -44,10 +49,15 @@ export function readWaiting(text: string, waiting: Waiting, settings: ReaderSett
   const match = bare.exec(text);
   if (!match) return undefined;
   const raw = match[2]!;
-  const numeral = waiting.field === 'ph' ? { value: readDecimal(raw), unsure: false } : readNumeral(raw, { point: settings.language !== 'en', comma: settings.language === 'en' });
+  const numeral =
+    waiting.field === 'ph'
+      ? { value: readDecimal(raw), unsure: false }
+      : readNumeral(raw, { point: settings.language !== 'en', comma: settings.language === 'en' });
   const value = match[1] === '-' ? -numeral.value : numeral.value;
   const fields = numeral.unsure ? undefined : fieldsFor(waiting.field, value, match[3], settings);
-  const problems = numeral.unsure ? [{ code: 'ambiguous-number' as const, about: raw }] : outOfBounds(fields ?? {}, text);
+  const problems = numeral.unsure
+    ? [{ code: 'ambiguous-number' as const, about: raw }]
+    : outOfBounds(fields ?? {}, text);
   if (!fields && problems.length === 0) return undefined;
   return {
     intent: waiting.reading.intent,

@@ -22,7 +22,8 @@ interface StrengthAt {
   readonly perLitre: boolean;
 }
 
-const isLabelled = (board: Board, i: number): boolean => board.terms[i]?.tags.some((tag) => tag.startsWith('label:') && tag !== 'label:so2') === true;
+const isLabelled = (board: Board, i: number): boolean =>
+  board.terms[i]?.tags.some((tag) => tag.startsWith('label:') && tag !== 'label:so2') === true;
 
 function strengthFrom(board: Board, i: number): StrengthAt | undefined {
   if (!isFree(board, i) || isMark(board, i - 1, '+') || isLabelled(board, i - 1)) return undefined;
@@ -34,14 +35,27 @@ function strengthFrom(board: Board, i: number): StrengthAt | undefined {
 }
 
 const JOINS = ['solution', 'powder', 'of', 'is', 'salt-word'] as const;
-const joins = (board: Board, i: number): boolean => JOINS.some((cue) => isCue(board, i, cue)) || isMark(board, i, '-') || isMark(board, i, '(') || isMark(board, i, ':');
+const joins = (board: Board, i: number): boolean =>
+  JOINS.some((cue) => isCue(board, i, cue)) ||
+  isMark(board, i, '-') ||
+  isMark(board, i, '(') ||
+  isMark(board, i, ':');
 
 /** The strength before or after the name at term `i`, across "solution", "of", a bracket. */
 function strengthNear(board: Board, i: number): StrengthAt | undefined {
   for (let k = i - 1; k >= i - 6 && k >= 0; k--) {
     const found = strengthFrom(board, k);
     if (found && found.to < i) return found;
-    if (board.terms[k]!.kind === 'number' || !(joins(board, k) || isMark(board, k, '%') || isMark(board, k, '/') || board.terms[k]!.tags.some((tag) => /^unit:(g|L)$/.test(tag)))) break;
+    if (
+      board.terms[k]!.kind === 'number' ||
+      !(
+        joins(board, k) ||
+        isMark(board, k, '%') ||
+        isMark(board, k, '/') ||
+        board.terms[k]!.tags.some((tag) => /^unit:(g|L)$/.test(tag))
+      )
+    )
+      break;
   }
   for (let k = i + 1; k <= i + 3; k++) {
     const found = strengthFrom(board, k);
@@ -52,17 +66,23 @@ function strengthNear(board: Board, i: number): StrengthAt | undefined {
 }
 
 function cueNear(board: Board, from: number, to: number, cue: 'solution' | 'salt-word'): boolean {
-  const near = (i: number): boolean => isCue(board, i, cue) || (isCue(board, i, 'of') && isCue(board, i - 1, cue));
+  const near = (i: number): boolean =>
+    isCue(board, i, cue) || (isCue(board, i, 'of') && isCue(board, i - 1, cue));
   for (let k = from; k <= to; k++) if (near(k)) return true;
   return near(from - 1) || near(to + 1) || (isMark(board, to + 1, '(') && near(to + 2));
 }
 
-const hasMillilitres = (board: Board): boolean => (['mL', 'cL', 'floz'] as const).some((unit: UnitId) => board.cues.has(`unit:${unit}`));
+const hasMillilitres = (board: Board): boolean =>
+  (['mL', 'cL', 'floz'] as const).some((unit: UnitId) => board.cues.has(`unit:${unit}`));
 
 const CLEAR_NAME = /water|acid|h2so3|aqueous|sulfurous|sulphurous|sulfurosa|saure/;
 
 function solutionOf(id: AdditiveId): AdditiveId {
-  return id === 'potassium-metabisulfite' ? 'potassium-metabisulfite-solution' : id === 'sodium-metabisulfite' ? 'sodium-metabisulfite-solution' : id;
+  return id === 'potassium-metabisulfite'
+    ? 'potassium-metabisulfite-solution'
+    : id === 'sodium-metabisulfite'
+      ? 'sodium-metabisulfite-solution'
+      : id;
 }
 
 const isPowder = (id: AdditiveId): boolean => solutionOf(id) !== id;
@@ -72,10 +92,20 @@ function findKnown(board: Board, i: number, named: AdditiveId): void {
   const [from, to] = [Math.min(i, strength?.from ?? i), Math.max(i, strength?.to ?? i)];
   const saysSolution = cueNear(board, from, to, 'solution');
   const saysSalt = cueNear(board, from, to, 'salt-word');
-  const id = isPowder(named) && (saysSolution || (strength !== undefined && !strength.perLitre && strength.percent <= 25)) ? solutionOf(named) : named;
+  const id =
+    isPowder(named) &&
+    (saysSolution || (strength !== undefined && !strength.perLitre && strength.percent <= 25))
+      ? solutionOf(named)
+      : named;
   if (strength === undefined) return keep(board, id, i, i);
   const { percent } = strength;
-  const mayBeAlcohol = isPowder(named) && !saysSolution && !strength.perLitre && percent >= 11 && percent <= 16 && !hasMillilitres(board);
+  const mayBeAlcohol =
+    isPowder(named) &&
+    !saysSolution &&
+    !strength.perLitre &&
+    percent >= 11 &&
+    percent <= 16 &&
+    !hasMillilitres(board);
   const unclear = mayBeAlcohol || (isPowder(named) && strength.perLitre && !saysSolution);
   if (unclear) {
     keep(board, named, i, i);
@@ -99,14 +129,16 @@ function findKnown(board: Board, i: number, named: AdditiveId): void {
 function keep(board: Board, id: AdditiveId, from: number, to: number): void {
   const before = findingOf(board, 'additive');
   if (before !== undefined && isPowder(id) && before.value === solutionOf(id)) return claim(board, from, to);
-  if (before !== undefined && isPowder(before.value) && id === solutionOf(before.value)) board.findings.splice(board.findings.indexOf(before), 1);
+  if (before !== undefined && isPowder(before.value) && id === solutionOf(before.value))
+    board.findings.splice(board.findings.indexOf(before), 1);
   find(board, 'additive', id, 'labelled', from, to);
 }
 
 /** `6% so2`, `SO2 at 6%`: the bare word becomes the solution through its strength. */
 function findBareSO2(board: Board, i: number): void {
   const strength = strengthNear(board, i);
-  if (strength && !strength.perLitre && strength.percent <= 100 && !isMark(board, i + 1, '/')) findKnown(board, i, 'sulfur-dioxide-solution');
+  if (strength && !strength.perLitre && strength.percent <= 100 && !isMark(board, i + 1, '/'))
+    findKnown(board, i, 'sulfur-dioxide-solution');
 }
 
 /** Finds the additive and its strength. Powder or solution: the word, or a strength up to 25 %, tells. */
@@ -120,7 +152,8 @@ export function findAdditive(board: Board): void {
       const strength = strengthNear(board, i);
       board.marks.unnamedAdditive = true;
       claim(board, i, i);
-      if (strength && strength.percent <= 25) find(board, 'strength_percent', strength.percent, 'labelled', strength.from, strength.to);
+      if (strength && strength.percent <= 25)
+        find(board, 'strength_percent', strength.percent, 'labelled', strength.from, strength.to);
       else if (strength) claim(board, strength.from, strength.to);
     }
   }

@@ -1,7 +1,8 @@
 import type { Board } from '../board.ts';
 import { figureAt, find, isCue, isFree, isMark, refuse } from '../board.ts';
 
-const isPercent = (board: Board, i: number): boolean => isMark(board, i, '%') || board.terms[i]?.text === 'percent' || board.terms[i]?.text === 'pct';
+const isPercent = (board: Board, i: number): boolean =>
+  isMark(board, i, '%') || board.terms[i]?.text === 'percent' || board.terms[i]?.text === 'pct';
 
 const SHARES = [
   ['third', 1 / 3],
@@ -31,7 +32,8 @@ function findShareAt(board: Board, value: number, from: number, to: number): boo
 
 function findPercentAt(board: Board, i: number): boolean {
   const { value } = figureAt(board, i);
-  const plus = isMark(board, i - 1, '+') || (isCue(board, i - 1, 'and') && board.terms[i - 1]?.text === 'plus');
+  const plus =
+    isMark(board, i - 1, '+') || (isCue(board, i - 1, 'and') && board.terms[i - 1]?.text === 'plus');
   const after = isPercent(board, i + 1) && isCue(board, i + 2, 'extra') ? i + 2 : undefined;
   const colon = isMark(board, i - 1, ':') || isMark(board, i - 1, '=') ? i - 2 : i - 1;
   const before = isCue(board, colon, 'binding');
@@ -51,7 +53,8 @@ export function findAllowance(board: Board): void {
       if (value < 1 && findShareAt(board, value, i, i + 2)) i += 2;
     } else if (isFree(board, i)) {
       const { value } = figureAt(board, i);
-      if (!findPercentAt(board, i) && value < 1 && board.terms[i]!.value !== undefined) findShareAt(board, value, i, i);
+      if (!findPercentAt(board, i) && value < 1 && board.terms[i]!.value !== undefined)
+        findShareAt(board, value, i, i);
     } else {
       const share = SHARES.find(([cue]) => isCue(board, i, cue));
       if (share) findShareAt(board, share[1], i, i);

@@ -10,7 +10,8 @@ export const USUAL_BARREL_L = 225;
 const SIZE_UNITS: readonly UnitId[] = ['L', 'gal', 'galUS', 'galUK', 'hL'];
 
 const isBarrel = (board: Board, i: number): boolean => hasTag(board, i, 'vessel:barrel');
-const isTimes = (board: Board, i: number): boolean => isMark(board, i, '×') || board.terms[i]?.text === 'x' || isMark(board, i, '*');
+const isTimes = (board: Board, i: number): boolean =>
+  isMark(board, i, '×') || board.terms[i]?.text === 'x' || isMark(board, i, '*');
 
 /** Litres in one of a unit, gallons as the chat has them. */
 export function litresOf(board: Board, unit: UnitId): number {
@@ -43,7 +44,10 @@ function sizeAt(board: Board, i: number, bare: boolean): { litres: number; to: n
 function findCounted(board: Board, i: number): boolean {
   const { value: count, from } = figureAt(board, i);
   if (count < 0 || !Number.isInteger(count)) return false;
-  const named = board.taken[i + 1] === true ? false : isBarrel(board, i + 1) || hasTag(board, i + 1, 'vessel:cask') || hasTag(board, i + 1, 'vessel:other');
+  const named =
+    board.taken[i + 1] === true
+      ? false
+      : isBarrel(board, i + 1) || hasTag(board, i + 1, 'vessel:cask') || hasTag(board, i + 1, 'vessel:other');
   const times = isTimes(board, i + 1);
   if (times) {
     const size = sizeAt(board, i + 2, true);
@@ -53,11 +57,23 @@ function findCounted(board: Board, i: number): boolean {
   }
   if (!named) {
     const size = sizeAt(board, i + 1, false);
-    const isSize = size !== undefined && isBarrel(board, size.to + 1) && count < 1000 && /^\d+$/.test(board.terms[i]!.text);
+    const isSize =
+      size !== undefined &&
+      isBarrel(board, size.to + 1) &&
+      count < 1000 &&
+      /^\d+$/.test(board.terms[i]!.text);
     return isSize && keep(board, count, size.litres, from, size.to + 1);
   }
   let at = i + 2;
-  while (isCue(board, at, 'of') || isCue(board, at, 'with') || isMark(board, at, '(') || isMark(board, at, '@') || isTimes(board, at) || isCue(board, at, 'is')) at++;
+  while (
+    isCue(board, at, 'of') ||
+    isCue(board, at, 'with') ||
+    isMark(board, at, '(') ||
+    isMark(board, at, '@') ||
+    isTimes(board, at) ||
+    isCue(board, at, 'is')
+  )
+    at++;
   const size = at <= i + 4 ? sizeAt(board, at, at > i + 2) : undefined;
   if (size && (at > i + 2 || size.litres <= 700)) {
     const each = isCue(board, size.to + 1, 'each') ? size.to + 1 : size.to;
@@ -93,7 +109,8 @@ export function findBarrels(board: Board): void {
     else if (board.taken[i] !== true && board.terms[i]!.kind === 'word') {
       if (isBarrel(board, i) && !isFound(board, 'vessel') && !isFound(board, 'vessels')) {
         const size = sizeAt(board, i + 1, false);
-        if (!size && board.marks.barrelsAssumed_L === undefined && !/s$/.test(board.terms[i]!.text)) board.marks.barrelsAssumed_L = USUAL_BARREL_L;
+        if (!size && board.marks.barrelsAssumed_L === undefined && !/s$/.test(board.terms[i]!.text))
+          board.marks.barrelsAssumed_L = USUAL_BARREL_L;
       }
       if (hasTag(board, i, 'vessel:cask')) board.marks.castsWithoutSize = true;
     }

@@ -9,8 +9,12 @@ const PRODUCTS: readonly Product[] = ['cider', 'mead', 'fruit-wine'];
 /** `rose to 3.6` is a verb, `sample port` a tap. */
 function isOtherwise(board: Board, i: number): boolean {
   const { text } = board.terms[i]!;
-  if (text === 'rose') return isCue(board, i + 1, 'to') || isCue(board, i + 1, 'by') || isCue(board, i + 1, 'from');
-  return text === 'port' && (isCue(board, i - 1, 'lot') || isCue(board, i - 1, 'vessel-statement') || isCue(board, i - 1, 'article'));
+  if (text === 'rose')
+    return isCue(board, i + 1, 'to') || isCue(board, i + 1, 'by') || isCue(board, i + 1, 'from');
+  return (
+    text === 'port' &&
+    (isCue(board, i - 1, 'lot') || isCue(board, i - 1, 'vessel-statement') || isCue(board, i - 1, 'article'))
+  );
 }
 
 /** Finds colour, category and product, and the word organic. */

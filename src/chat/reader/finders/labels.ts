@@ -1,14 +1,37 @@
 import type { Board } from '../board.ts';
-import { claim, decimalAt, figureAt, find, hasTag, isCue, isFree, isMark, refuse, setAside } from '../board.ts';
+import {
+  claim,
+  decimalAt,
+  figureAt,
+  find,
+  hasTag,
+  isCue,
+  isFree,
+  isMark,
+  refuse,
+  setAside,
+} from '../board.ts';
 import type { Figure, Said } from '../board.ts';
 import { celsiusFrom } from '../../../core/units/temperature.ts';
 import type { LabelId } from '../words/words.ts';
 import { MASS_UNITS, VOLUME_UNITS, concentrationAt, mg_L_IN, unitAt } from '../units.ts';
 
-const LABELS: readonly LabelId[] = ['ph', 'free', 'total', 'temperature', 'alcohol', 'sugar', 'aside', 'so2', 'volume'];
+const LABELS: readonly LabelId[] = [
+  'ph',
+  'free',
+  'total',
+  'temperature',
+  'alcohol',
+  'sugar',
+  'aside',
+  'so2',
+  'volume',
+];
 
 const labelAt = (board: Board, i: number): LabelId | undefined =>
-  board.terms[i]?.kind === 'word' && board.taken[i] !== true ? LABELS.find((one) => hasTag(board, i, `label:${one}`)) : undefined;
+  board.terms[i]?.kind === 'word' && board.taken[i] !== true
+    ? LABELS.find((one) => hasTag(board, i, `label:${one}`))
+    : undefined;
 
 /** A figure beside a label, with the terms between them that only join. */
 interface Beside {
@@ -19,7 +42,13 @@ interface Beside {
 const isJoin = (board: Board, i: number): boolean => {
   const term = board.terms[i];
   if (term === undefined) return false;
-  if (term.kind === 'mark') return term.text === ':' || term.text === '=' || term.text === '~' || (term.text === '-' && !(term.gap && board.terms[i + 1]?.gap === false));
+  if (term.kind === 'mark')
+    return (
+      term.text === ':' ||
+      term.text === '=' ||
+      term.text === '~' ||
+      (term.text === '-' && !(term.gap && board.terms[i + 1]?.gap === false))
+    );
   return isCue(board, i, 'is') && labelAt(board, i) === undefined;
 };
 
@@ -36,8 +65,17 @@ function unitEnd(board: Board, i: number): number {
   if (conc) return conc.to;
   let k = i + 1;
   if (isMark(board, k, '%') || isMark(board, k, '°')) k++;
-  while (k <= i + 3 && board.terms[k]?.gap !== true && (hasTag(board, k, 'unit:C') || hasTag(board, k, 'unit:F') || hasTag(board, k, 'unit:degree'))) k++;
-  if (k === i + 1 && (hasTag(board, k, 'unit:C') || hasTag(board, k, 'unit:F') || hasTag(board, k, 'unit:degree'))) k++;
+  while (
+    k <= i + 3 &&
+    board.terms[k]?.gap !== true &&
+    (hasTag(board, k, 'unit:C') || hasTag(board, k, 'unit:F') || hasTag(board, k, 'unit:degree'))
+  )
+    k++;
+  if (
+    k === i + 1 &&
+    (hasTag(board, k, 'unit:C') || hasTag(board, k, 'unit:F') || hasTag(board, k, 'unit:degree'))
+  )
+    k++;
   if (k > i + 1 && hasTag(board, k, 'label:volume') && isMark(board, k - 1, '%')) k++;
   return k - 1;
 }
@@ -52,12 +90,14 @@ function figureAfter(board: Board, i: number): Beside | undefined {
 function figureBefore(board: Board, i: number): Beside | undefined {
   let k = i - 1;
   while (k > i - 3 && (isCue(board, k, 'of') || isCue(board, k, 'article'))) k--;
-  for (let at = k; at >= k - 4 && at >= 0; at--) if (isFree(board, at)) return unitEnd(board, at) === k || at === k ? { at, to: k } : undefined;
+  for (let at = k; at >= k - 4 && at >= 0; at--)
+    if (isFree(board, at)) return unitEnd(board, at) === k || at === k ? { at, to: k } : undefined;
   return undefined;
 }
 
 const hasForeignUnit = (board: Board, at: number): boolean =>
-  unitAt(board, at + 1, VOLUME_UNITS) !== undefined || (unitAt(board, at + 1, MASS_UNITS) !== undefined && concentrationAt(board, at + 1) === undefined);
+  unitAt(board, at + 1, VOLUME_UNITS) !== undefined ||
+  (unitAt(board, at + 1, MASS_UNITS) !== undefined && concentrationAt(board, at + 1) === undefined);
 
 /** Whether a figure may be what the label says, so that its neighbour's figure is not taken for it. */
 function fits(label: LabelId, { value }: Figure): boolean {
@@ -72,30 +112,44 @@ function reads(board: Board, i: number, label: LabelId): Beside | undefined {
   const [after, before] = [figureAfter(board, i), figureBefore(board, i)];
   if (!after || hasForeignUnit(board, after.at)) return before ?? after;
   if (!before || hasForeignUnit(board, before.at)) return after;
-  const figure = (one: Beside): Figure => (label === 'ph' ? decimalAt(board, one.at) : figureAt(board, one.at));
-  if (fits(label, figure(after)) !== fits(label, figure(before))) return fits(label, figure(after)) ? after : before;
+  const figure = (one: Beside): Figure =>
+    label === 'ph' ? decimalAt(board, one.at) : figureAt(board, one.at);
+  if (fits(label, figure(after)) !== fits(label, figure(before)))
+    return fits(label, figure(after)) ? after : before;
   const next = labelAt(board, after.to + 1);
-  if (next === undefined) return board.terms[after.to + 1]?.kind === 'number' || !board.terms[before.at]?.gap ? after : isPrefixed(board, i) ? after : before;
+  if (next === undefined)
+    return board.terms[after.to + 1]?.kind === 'number' || !board.terms[before.at]?.gap
+      ? after
+      : isPrefixed(board, i)
+        ? after
+        : before;
   return endsWithLabel(board, after.to + 1) ? before : after;
 }
 
 /** Whether an earlier label of this message already stood before its figure. */
-const isPrefixed = (board: Board, i: number): boolean => board.findings.some(({ said, from, to }) => said === 'labelled' && to < i && labelBefore(board, from));
+const isPrefixed = (board: Board, i: number): boolean =>
+  board.findings.some(({ said, from, to }) => said === 'labelled' && to < i && labelBefore(board, from));
 const labelBefore = (board: Board, from: number): boolean => board.terms[from]?.kind === 'word';
 
 /** Follows label, figure, label, figure … and says whether a label closes it. */
 function endsWithLabel(board: Board, i: number): boolean {
-  for (let k = i; ; ) {
+  for (let k = i, hops = 0; hops < 8; hops++) {
     const after = figureAfter(board, k);
     if (!after || hasForeignUnit(board, after.at)) return true;
     if (labelAt(board, after.to + 1) === undefined) return false;
     k = after.to + 1;
   }
+  return false;
 }
 
 function isRangeAt(board: Board, { at, to }: Beside): number | undefined {
-  const joins = isMark(board, to + 1, '-') && !(board.terms[to + 1]!.gap && board.terms[to + 2]?.gap === true) && board.terms[to + 2]?.gap !== true;
-  return joins && isFree(board, to + 2) && !hasForeignUnit(board, to + 2) && isMark(board, at + 1, '-') ? to + 2 : undefined;
+  const joins =
+    isMark(board, to + 1, '-') &&
+    !(board.terms[to + 1]!.gap && board.terms[to + 2]?.gap === true) &&
+    board.terms[to + 2]?.gap !== true;
+  return joins && isFree(board, to + 2) && !hasForeignUnit(board, to + 2) && isMark(board, at + 1, '-')
+    ? to + 2
+    : undefined;
 }
 
 /** `18 no 20`: a correction inside the message. */
@@ -111,21 +165,54 @@ function keepFigure(board: Board, label: LabelId, beside: Beside, from: number, 
   const said: Said = 'labelled';
   const figure = label === 'ph' ? decimalAt(board, beside.at) : figureAt(board, beside.at);
   const conc = concentrationAt(board, beside.at + 1);
-  if (Number.isNaN(figure.value) || figure.unsure) return refuse(board, 'ambiguous-number', beside.at, beside.to);
+  if (Number.isNaN(figure.value) || figure.unsure)
+    return refuse(board, 'ambiguous-number', beside.at, beside.to);
   const isSO2 = label === 'free' || label === 'total' || label === 'so2';
-  if (conc && (label === 'ph' || label === 'temperature' || label === 'alcohol')) return refuse(board, 'unit-mismatch', from, to);
-  if (isSO2 && (isMark(board, beside.at + 1, '%') || isMark(board, beside.at + 1, '°') || conc?.id === 'g/L')) return refuse(board, 'unit-mismatch', from, to);
-  if (conc?.id === 'ppm' || conc?.id === 'mg/L' || conc?.id === 'g/hL') board.marks.concentrationUnit ??= conc.id;
+  if (conc && (label === 'ph' || label === 'temperature' || label === 'alcohol'))
+    return refuse(board, 'unit-mismatch', from, to);
+  if (isSO2 && (isMark(board, beside.at + 1, '%') || isMark(board, beside.at + 1, '°') || conc?.id === 'g/L'))
+    return refuse(board, 'unit-mismatch', from, to);
+  if (conc?.id === 'ppm' || conc?.id === 'mg/L' || conc?.id === 'g/hL')
+    board.marks.concentrationUnit ??= conc.id;
   if (figure.value < 0 && label !== 'temperature') return refuse(board, 'negative-value', from, to);
   const value = figure.value * (isSO2 && conc ? mg_L_IN[conc.id]! : 1);
   if (label === 'ph') find(board, 'ph', value, said, from, to);
   else if (label === 'free') find(board, 'free_mg_L', value, said, from, to);
   else if (label === 'total') find(board, 'total_mg_L', value, said, from, to);
   else if (label === 'alcohol') find(board, 'alcohol_percent', value, said, from, to);
-  else if (label === 'sugar') find(board, 'sugar_g_L', isMark(board, beside.at + 1, '%') ? value * 10 : conc && conc.id !== 'g/L' ? (value * mg_L_IN[conc.id]!) / 1000 : value, said, from, to);
+  else if (label === 'sugar')
+    find(
+      board,
+      'sugar_g_L',
+      isMark(board, beside.at + 1, '%')
+        ? value * 10
+        : conc && conc.id !== 'g/L'
+          ? (value * mg_L_IN[conc.id]!) / 1000
+          : value,
+      said,
+      from,
+      to,
+    );
   else if (label === 'temperature') {
-    const unit = [beside.at + 1, beside.at + 2, beside.at + 3].map((k) => (k > beside.to ? undefined : hasTag(board, k, 'unit:F') ? 'F' : hasTag(board, k, 'unit:C') ? 'C' : undefined)).find(Boolean);
-    find(board, 'temperature_C', celsiusFrom(figure.value, unit ?? board.settings.temperatureUnit), said, from, to);
+    const unit = [beside.at + 1, beside.at + 2, beside.at + 3]
+      .map((k) =>
+        k > beside.to
+          ? undefined
+          : hasTag(board, k, 'unit:F')
+            ? 'F'
+            : hasTag(board, k, 'unit:C')
+              ? 'C'
+              : undefined,
+      )
+      .find(Boolean);
+    find(
+      board,
+      'temperature_C',
+      celsiusFrom(figure.value, unit ?? board.settings.temperatureUnit),
+      said,
+      from,
+      to,
+    );
   } else if (label === 'so2') keepBareSO2(board, value, from, to);
   else if (label === 'volume') refuse(board, 'ambiguous-number', from, to);
 }
@@ -133,7 +220,13 @@ function keepFigure(board: Board, label: LabelId, beside: Beside, from: number, 
 /** `SO2 18` is free SO2 up to 60 and said; above it may be total: ask. */
 function keepBareSO2(board: Board, value: number, from: number, to: number): void {
   if (value > 60) return refuse(board, 'ambiguous-number', from, to);
-  board.notes.push({ id: 'free-unlabelled', text: board.message.slice(board.folded.at[board.terms[from]!.start], (board.folded.at[board.terms[to]!.end - 1] ?? 0) + 1) });
+  board.notes.push({
+    id: 'free-unlabelled',
+    text: board.message.slice(
+      board.folded.at[board.terms[from]!.start],
+      (board.folded.at[board.terms[to]!.end - 1] ?? 0) + 1,
+    ),
+  });
   find(board, 'free_mg_L', value, 'bare', from, to);
 }
 
@@ -153,7 +246,8 @@ function findLabel(board: Board, i: number, label: LabelId): void {
     return;
   }
   if (!beside) {
-    if (volumeTaken !== undefined && label !== 'so2' && label !== 'volume' && label !== 'sugar') mismatch(board, i, volumeTaken);
+    if (volumeTaken !== undefined && label !== 'so2' && label !== 'volume' && label !== 'sugar')
+      mismatch(board, i, volumeTaken);
     return;
   }
   const [from, to] = [Math.min(i, figureAt(board, beside.at).from), Math.max(i, beside.to)];
@@ -161,11 +255,17 @@ function findLabel(board: Board, i: number, label: LabelId): void {
     if (label !== 'volume' && label !== 'so2') refuse(board, 'unit-mismatch', from, to + 1);
     return;
   }
-  if (isMark(board, beside.at + 1, '/') && isFree(board, beside.at + 2) && (label === 'so2' || label === 'free' || label === 'total' || label === 'ph')) return claimPairLabel(board, i);
+  if (
+    isMark(board, beside.at + 1, '/') &&
+    isFree(board, beside.at + 2) &&
+    (label === 'so2' || label === 'free' || label === 'total' || label === 'ph')
+  )
+    return claimPairLabel(board, i);
   const range = isRangeAt(board, beside);
   if (range !== undefined && label !== 'volume') return refuse(board, 'ambiguous-number', from, range);
   const corrected = correctionAt(board, beside.to);
-  if (corrected !== undefined && figureAt(board, corrected).value !== figureAt(board, beside.at).value) return refuse(board, 'conflicting-values', from, corrected);
+  if (corrected !== undefined && figureAt(board, corrected).value !== figureAt(board, beside.at).value)
+    return refuse(board, 'conflicting-values', from, corrected);
   keepFigure(board, label, beside, from, to);
 }
 
@@ -177,8 +277,15 @@ function claimPairLabel(board: Board, i: number): void {
 /** `free 20 hl`: the figure after the label was read as a volume or a mass. */
 function isForeignAfter(board: Board, i: number): number | undefined {
   let k = i + 1;
-  while (isMark(board, k, ':') || isMark(board, k, '=') || (isCue(board, k, 'is') && board.terms[k]?.kind === 'word')) k++;
-  const index = board.findings.findIndex(({ field, from }) => (field === 'volume_L' || field === 'mass_g') && from === k);
+  while (
+    isMark(board, k, ':') ||
+    isMark(board, k, '=') ||
+    (isCue(board, k, 'is') && board.terms[k]?.kind === 'word')
+  )
+    k++;
+  const index = board.findings.findIndex(
+    ({ field, from }) => (field === 'volume_L' || field === 'mass_g') && from === k,
+  );
   return board.terms[k]?.kind === 'number' && index >= 0 ? index : undefined;
 }
 

@@ -11,12 +11,13 @@ export const gramsOf = (unit: UnitId): number =>
 /** `1.250 kg`, `1,250 kg`: a kilogram and a quarter, or more than a ton? Asked in every language. */
 export const isThreeDigits = (text: string): boolean => /^[1-9]\d{0,2}[.,]\d{3}$/.test(text);
 
-const skipsTo = (board: Board, i: number): number => (isCue(board, i, 'of') || isCue(board, i, 'article') ? i + 1 : i);
+const skipsTo = (board: Board, i: number): number =>
+  isCue(board, i, 'of') || isCue(board, i, 'article') ? i + 1 : i;
 
-/** A capital G with "of must", "of wine", "of juice" may mean gallons. */
+/** A `G` with "of must", "of wine", "of juice" may mean gallons; grams of wine nobody weighs. */
 export const mayBeGallons = (board: Board, unit: number): boolean => {
   const term = board.terms[unit];
-  return term?.text === 'g' && term.capital && isCue(board, unit + 1, 'of') && isCue(board, unit + 2, 'wine');
+  return term?.text === 'g' && isCue(board, unit + 1, 'of') && isCue(board, unit + 2, 'wine');
 };
 
 const isFruit = (board: Board, i: number): boolean => isCue(board, skipsTo(board, i), 'fruit');
@@ -32,13 +33,22 @@ function findMassAt(board: Board, i: number): void {
   if (!unit || concentrationAt(board, i + 1)) return;
   const { value, from } = figureAt(board, i);
   if (unit.id === 'mg' && !board.terms[unit.to + 1]?.tags.some((tag) => tag.startsWith('additive'))) return;
-  if (mayBeGallons(board, unit.to) || isThreeDigits(board.terms[i]!.text) || Number.isNaN(value)) return refuse(board, 'ambiguous-number', i, unit.to);
-  if (isFruit(board, unit.to + 1) || unit.id === 'ton' || unit.id === 'quintal' || (unit.id !== 'g' && hasTag(board, skipsTo(board, unit.to + 1), 'stage:must'))) {
+  if (mayBeGallons(board, unit.to) || isThreeDigits(board.terms[i]!.text) || Number.isNaN(value))
+    return refuse(board, 'ambiguous-number', i, unit.to);
+  if (
+    isFruit(board, unit.to + 1) ||
+    unit.id === 'ton' ||
+    unit.id === 'quintal' ||
+    (unit.id !== 'g' && hasTag(board, skipsTo(board, unit.to + 1), 'stage:must'))
+  ) {
     board.marks.fruitByWeight = true;
     return claim(board, from, unit.to);
   }
   if (value < 0) return refuse(board, 'negative-value', from, unit.to);
-  const more = unit.id === 'lb' ? ouncesAfter(board, isCue(board, unit.to + 1, 'and') ? unit.to + 2 : unit.to + 1) : undefined;
+  const more =
+    unit.id === 'lb'
+      ? ouncesAfter(board, isCue(board, unit.to + 1, 'and') ? unit.to + 2 : unit.to + 1)
+      : undefined;
   const range = isMark(board, i - 1, '-') && isFree(board, i - 2) && from === i;
   if (range) return refuse(board, 'ambiguous-number', i - 2, unit.to);
   find(board, 'mass_g', value * gramsOf(unit.id) + (more?.grams ?? 0), 'unit', from, more?.to ?? unit.to);

@@ -7,14 +7,23 @@ const isCounted = (board: Board, i: number): boolean =>
   unitAt(board, i, MASS_UNITS) !== undefined ||
   concentrationAt(board, i) !== undefined ||
   isCue(board, i, 'tablet') ||
-  ['vessel:barrel', 'vessel:cask', 'additive:campden'].some((tag) => hasTag(board, i, tag as 'vessel:barrel'));
+  ['vessel:barrel', 'vessel:cask', 'additive:campden'].some((tag) =>
+    hasTag(board, i, tag as 'vessel:barrel'),
+  );
 
 /** Refuses a number in words where a figure should stand: `two barrels`, `half a pound`. */
 export function findNumberWord(board: Board): void {
   for (let i = 0; i < board.terms.length; i++) {
     if (!isCue(board, i, 'number-word') || board.taken[i] === true) continue;
-    const to = isCue(board, i + 1, 'of') || isCue(board, i + 1, 'article') || isCue(board, i + 1, 'number-word') ? i + 2 : i + 1;
+    const to =
+      isCue(board, i + 1, 'of') || isCue(board, i + 1, 'article') || isCue(board, i + 1, 'number-word')
+        ? i + 2
+        : i + 1;
     if (isCounted(board, to) && board.taken[to] !== true) refuse(board, 'ambiguous-number', i, to);
-    else if (board.terms[i - 1]?.tags.some((tag) => /^label:(free|total|ph)$/.test(tag)) && !isCue(board, i, 'plain')) refuse(board, 'ambiguous-number', i - 1, i);
+    else if (
+      board.terms[i - 1]?.tags.some((tag) => /^label:(free|total|ph)$/.test(tag)) &&
+      !isCue(board, i, 'plain')
+    )
+      refuse(board, 'ambiguous-number', i - 1, i);
   }
 }

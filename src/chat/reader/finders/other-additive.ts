@@ -4,7 +4,8 @@ import { findingOf, hasTag, holdsCue, isCue, isFound, placeOf, refuse } from '..
 const CHEMICAL_SLIP = /^(meta)?bi?sul(f|ph)ates?$|metabisul(f|ph)(ate|ide)s?$/;
 
 /** What may stand between an amount and its additive. */
-const isBetween = (board: Board, i: number): boolean => isCue(board, i, 'of') || isCue(board, i, 'article') || board.terms[i]?.kind === 'mark';
+const isBetween = (board: Board, i: number): boolean =>
+  isCue(board, i, 'of') || isCue(board, i, 'article') || board.terms[i]?.kind === 'mark';
 
 /** The term in the additive's place: right after or before the amount. */
 function placeAfter(board: Board, to: number): number {
@@ -15,7 +16,8 @@ function placeAfter(board: Board, to: number): number {
 
 function refuseWord(board: Board, i: number): void {
   const { text } = placeOf(board, i, i);
-  if (CHEMICAL_SLIP.test(board.terms[i]!.text.split(' ').at(-1) ?? '')) board.notes.push({ id: 'did-you-mean', text });
+  if (CHEMICAL_SLIP.test(board.terms[i]!.text.split(' ').at(-1) ?? ''))
+    board.notes.push({ id: 'did-you-mean', text });
   refuse(board, 'unknown-additive', i, i);
 }
 
@@ -26,7 +28,8 @@ const isPlainWord = (board: Board, i: number): boolean => {
 
 /** Refuses a word in the additive's place that is none: bentonite, a sulphur wick, a sulfate. */
 export function findOtherAdditive(board: Board): void {
-  const amount = findingOf(board, 'mass_g') ?? findingOf(board, 'additive_volume_mL') ?? findingOf(board, 'rate_mg_L');
+  const amount =
+    findingOf(board, 'mass_g') ?? findingOf(board, 'additive_volume_mL') ?? findingOf(board, 'rate_mg_L');
   const named = isFound(board, 'additive') || board.marks.unnamedAdditive === true;
   const isNone = (i: number): boolean => hasTag(board, i, 'additive:none') && board.taken[i] !== true;
   if (amount) {
@@ -34,13 +37,21 @@ export function findOtherAdditive(board: Board): void {
     const before = isBetween(board, amount.from - 1) ? amount.from - 2 : amount.from - 1;
     if (isNone(after)) return refuseWord(board, after);
     if (isNone(before)) return refuseWord(board, before);
-    if (!named && isPlainWord(board, after) && after <= amount.to + 2 && !isBetween(board, after)) return refuseWord(board, after);
+    if (!named && isPlainWord(board, after) && after <= amount.to + 2 && !isBetween(board, after))
+      return refuseWord(board, after);
   }
   if (named) return;
   const anywhere = board.terms.findIndex((_, i) => isNone(i));
   if (anywhere < 0) return;
-  const counted = board.terms[anywhere - 1]?.kind === 'number';
-  const wanted = counted || amount !== undefined || board.pastTense || holdsCue(board, 'how-much') || holdsCue(board, 'add') || board.marks.spoon === true;
+  const isWick = /wick|stick|disc|strip|candle/.test(board.terms[anywhere]!.text) && isFound(board, 'vessel');
+  const counted = isWick || board.terms[anywhere - 1]?.kind === 'number';
+  const wanted =
+    counted ||
+    amount !== undefined ||
+    board.pastTense ||
+    holdsCue(board, 'how-much') ||
+    holdsCue(board, 'add') ||
+    board.marks.spoon === true;
   const isFigure = isFound(board, 'ph') || isFound(board, 'free_mg_L');
   if (wanted && !(isFigure && amount === undefined && !board.pastTense)) refuseWord(board, anywhere);
 }

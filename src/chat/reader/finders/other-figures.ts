@@ -2,7 +2,8 @@ import type { Board } from '../board.ts';
 import { hasTag, isCue, isFree, isMark, refuse, setAside } from '../board.ts';
 
 const textAt = (board: Board, i: number): string => board.terms[i]?.text ?? '';
-const isPlainWhole = (board: Board, i: number): boolean => isFree(board, i) && /^\d+$/.test(textAt(board, i)) && board.terms[i]!.value === undefined;
+const isPlainWhole = (board: Board, i: number): boolean =>
+  isFree(board, i) && /^\d+$/.test(textAt(board, i)) && board.terms[i]!.value === undefined;
 const isLabelBefore = (board: Board, i: number): boolean =>
   board.terms[i - 1]?.tags.some((tag) => tag.startsWith('label:') && tag !== 'label:aside') === true;
 const isUnitAfter = (board: Board, i: number): boolean =>
@@ -12,19 +13,29 @@ const isUnitAfter = (board: Board, i: number): boolean =>
 function dateEnd(board: Board, i: number): number | undefined {
   const mark = textAt(board, i + 1);
   if ((mark !== '/' && mark !== '-') || textAt(board, i + 3) !== mark) return undefined;
-  return [i, i + 2, i + 4].every((k) => isPlainWhole(board, k)) && board.terms[i + 1]!.gap === false ? i + 4 : undefined;
+  return [i, i + 2, i + 4].every((k) => isPlainWhole(board, k)) && board.terms[i + 1]!.gap === false
+    ? i + 4
+    : undefined;
 }
 
 /** `8:30`, and `3.30 pm`. */
 function clockEnd(board: Board, i: number): number | undefined {
-  if (!isMark(board, i + 1, ':') || !isPlainWhole(board, i + 2) || board.terms[i + 1]!.gap || board.terms[i + 2]!.gap) return undefined;
+  if (
+    !isMark(board, i + 1, ':') ||
+    !isPlainWhole(board, i + 2) ||
+    board.terms[i + 1]!.gap ||
+    board.terms[i + 2]!.gap
+  )
+    return undefined;
   return hasTag(board, i + 3, 'unit:none-of-ours') ? i + 3 : i + 2;
 }
 
 function vintageEnd(board: Board, i: number): number | undefined {
   const text = textAt(board, i);
   const year = /^(19[89]\d|20[0-3]\d)$/.test(text) && board.terms[i]!.value === undefined;
-  return year && !isUnitAfter(board, i) && !isLabelBefore(board, i) && !isCue(board, i + 1, 'thousand') ? i : undefined;
+  return year && !isUnitAfter(board, i) && !isLabelBefore(board, i) && !isCue(board, i + 1, 'thousand')
+    ? i
+    : undefined;
 }
 
 /** A number between words that say it is a month's day, a lot, a block: `12 Nov`, `lot 4471`, `block 7`. */
@@ -40,8 +51,13 @@ function namedEnd(board: Board, i: number): number | undefined {
 /** A blank inside a decimal: `pH 3. 61` could be 3.61, or 3 and 61. */
 function brokenDecimalEnd(board: Board, i: number): number | undefined {
   if (!/^[2-4]$/.test(textAt(board, i)) || board.terms[i + 1]?.gap !== false) return undefined;
-  const isPoint = isMark(board, i + 1, '.') || (isMark(board, i + 1, ',') && hasTag(board, i - 1, 'label:ph'));
-  return isPoint && /^\d{1,2}$/.test(textAt(board, i + 2)) && board.terms[i + 2]!.gap && !isUnitAfter(board, i + 2) && !hasTag(board, i + 3, 'label:free')
+  const isPoint =
+    isMark(board, i + 1, '.') || (isMark(board, i + 1, ',') && hasTag(board, i - 1, 'label:ph'));
+  return isPoint &&
+    /^\d{1,2}$/.test(textAt(board, i + 2)) &&
+    board.terms[i + 2]!.gap &&
+    !isUnitAfter(board, i + 2) &&
+    !hasTag(board, i + 3, 'label:free')
     ? i + 2
     : undefined;
 }
@@ -49,7 +65,11 @@ function brokenDecimalEnd(board: Board, i: number): number | undefined {
 const isBullet = (board: Board, i: number): boolean => {
   const before = board.terms[i - 1];
   const starts = before === undefined || before.kind === 'break';
-  return starts && isPlainWhole(board, i) && (isMark(board, i + 1, ')') || (isMark(board, i + 1, '.') && board.terms[i + 2]?.gap === true));
+  return (
+    starts &&
+    isPlainWhole(board, i) &&
+    (isMark(board, i + 1, ')') || (isMark(board, i + 1, '.') && board.terms[i + 2]?.gap === true))
+  );
 };
 
 /** Sets aside dates, times, vintages, lots and figures with units that are none of ours. */

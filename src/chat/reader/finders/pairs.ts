@@ -15,16 +15,21 @@ const isSlash = (board: Board, i: number): boolean => isMark(board, i, '/');
 /** Whether SO2 is named or a unit stands beside the pair, so that it is no date. */
 function isNamed(board: Board, from: number, to: number): boolean {
   const tags = [from - 1, from - 2, to + 1].flatMap((k) => board.terms[k]?.tags ?? []);
-  return concentrationAt(board, to + 1) !== undefined || tags.some((tag) => tag === 'label:so2' || tag === 'label:free' || tag === 'label:total');
+  return (
+    concentrationAt(board, to + 1) !== undefined ||
+    tags.some((tag) => tag === 'label:so2' || tag === 'label:free' || tag === 'label:total')
+  );
 }
 
-const isDate = (a: number, b: number): boolean => (a >= 1 && a <= 31 && b >= 1 && b <= 12) || (b >= 1 && b <= 31 && a >= 1 && a <= 12);
+const isDate = (a: number, b: number): boolean =>
+  (a >= 1 && a <= 31 && b >= 1 && b <= 12) || (b >= 1 && b <= 31 && a >= 1 && a <= 12);
 
 function findFreeAndTotal(board: Board, i: number, from: number): void {
   const [free, total] = [figureAt(board, i).value, figureAt(board, i + 2).value];
   const unit = concentrationAt(board, i + 3);
   const to = unit?.to ?? i + 2;
-  if (from === i && !isNamed(board, i, i + 2) && isDate(free, total)) return refuse(board, 'ambiguous-number', i, to);
+  if (from === i && !isNamed(board, i, i + 2) && isDate(free, total))
+    return refuse(board, 'ambiguous-number', i, to);
   if (total < free) return refuse(board, 'total-below-free', i, to);
   if (total < LEAST_CLEAR_RATIO * free && from === i) return refuse(board, 'ambiguous-number', i, to);
   const scale = unit?.id === 'g/hL' ? 10 : 1;
@@ -32,6 +37,10 @@ function findFreeAndTotal(board: Board, i: number, from: number): void {
   find(board, 'free_mg_L', free * scale, 'labelled', i, to);
   find(board, 'total_mg_L', total * scale, 'labelled', i, to);
 }
+
+/** `free/total 18/60`. */
+const isFreeBefore = (board: Board, i: number): boolean =>
+  hasTag(board, i - 2, 'label:free') || (isSlash(board, i - 2) && hasTag(board, i - 3, 'label:free'));
 
 /** Finds `18/60` (free and total), `3.6/18` and `3.6/18/60` (with the pH first). */
 export function findPairs(board: Board): void {
@@ -41,8 +50,17 @@ export function findPairs(board: Board): void {
       const three = isSlash(board, i + 3) && isFree(board, i + 4);
       find(board, 'ph', decimalAt(board, i).value, 'labelled', i, i);
       if (three) findFreeAndTotal(board, i + 2, i);
-      else find(board, 'free_mg_L', figureAt(board, i + 2).value, 'labelled', i + 2, concentrationAt(board, i + 3)?.to ?? i + 2);
-    } else if (hasTag(board, i - 1, 'label:total') && !hasTag(board, i - 2, 'label:free')) refuse(board, 'ambiguous-number', i, i + 2);
+      else
+        find(
+          board,
+          'free_mg_L',
+          figureAt(board, i + 2).value,
+          'labelled',
+          i + 2,
+          concentrationAt(board, i + 3)?.to ?? i + 2,
+        );
+    } else if (hasTag(board, i - 1, 'label:total') && !isFreeBefore(board, i))
+      refuse(board, 'ambiguous-number', i, i + 2);
     else findFreeAndTotal(board, i, i);
   }
 }

@@ -10,7 +10,13 @@ function cueBetween(board: Board, from: number, to: number, cue: 'not' | 'if' | 
 function isFact(board: Board, i: number): boolean {
   const first = board.terms.findIndex(({ kind }) => kind === 'word');
   const asks = first >= 0 && first < i && isCue(board, first, 'question');
-  return !asks && !isMark(board, i + 1, '?') && !cueBetween(board, i - 5, i, 'not') && !cueBetween(board, 0, i, 'if') && !cueBetween(board, 0, i, 'not-yet');
+  return (
+    !asks &&
+    !isMark(board, i + 1, '?') &&
+    !cueBetween(board, i - 5, i, 'not') &&
+    !cueBetween(board, 0, i, 'if') &&
+    !cueBetween(board, 0, i, 'not-yet')
+  );
 }
 
 /** Finds that something was added: a past-tense verb that is neither negated, conditional, asked nor still to come. */

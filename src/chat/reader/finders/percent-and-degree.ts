@@ -2,15 +2,18 @@ import { celsiusFrom } from '../../../core/units/temperature.ts';
 import type { Board } from '../board.ts';
 import { figureAt, find, hasTag, isFree, isMark, refuse } from '../board.ts';
 
-const isPercent = (board: Board, i: number): boolean => isMark(board, i, '%') || ['percent', 'pct'].includes(board.terms[i]?.text ?? '');
+const isPercent = (board: Board, i: number): boolean =>
+  isMark(board, i, '%') || ['percent', 'pct'].includes(board.terms[i]?.text ?? '');
 
-const unitOf = (board: Board, i: number): 'C' | 'F' | undefined => (hasTag(board, i, 'unit:C') ? 'C' : hasTag(board, i, 'unit:F') ? 'F' : undefined);
+const unitOf = (board: Board, i: number): 'C' | 'F' | undefined =>
+  hasTag(board, i, 'unit:C') ? 'C' : hasTag(board, i, 'unit:F') ? 'F' : undefined;
 
 /** `13.5%`, `13.5 % vol`, `13,5° alc`: an unlabelled % from 5 to 22 is alcohol. */
 function findPercent(board: Board, i: number): void {
   const { value } = figureAt(board, i);
   const vol = hasTag(board, i + 2, 'label:volume') || hasTag(board, i + 2, 'label:alcohol');
-  if (vol || (value >= 5 && value <= 22)) find(board, 'alcohol_percent', value, vol ? 'labelled' : 'unit', i, vol ? i + 2 : i + 1);
+  if (vol || (value >= 5 && value <= 22))
+    find(board, 'alcohol_percent', value, vol ? 'labelled' : 'unit', i, vol ? i + 2 : i + 1);
   else refuse(board, 'ambiguous-number', i, i + 1);
 }
 
@@ -22,7 +25,8 @@ function findDegrees(board: Board, i: number): void {
   const { value, from } = figureAt(board, i);
   if (unit === 'F' && !sign && board.terms[at]!.gap && value < 40) return;
   if (unit) find(board, 'temperature_C', celsiusFrom(value, unit), 'unit', from, at);
-  else if (sign && hasTag(board, at, 'label:alcohol')) find(board, 'alcohol_percent', value, 'labelled', i, at);
+  else if (sign && hasTag(board, at, 'label:alcohol'))
+    find(board, 'alcohol_percent', value, 'labelled', i, at);
   else if (sign) refuse(board, 'ambiguous-number', i, i + 1);
 }
 

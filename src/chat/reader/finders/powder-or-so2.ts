@@ -3,14 +3,33 @@ import { holdsCue, isCue, isFree, isMark, refuse } from '../board.ts';
 import { concentrationAt } from '../units.ts';
 
 const isAdditive = (board: Board, i: number): boolean =>
-  board.terms[i]?.tags.some((tag) => tag.startsWith('additive:') && tag !== 'additive:none' && tag !== 'additive:sulfur-dioxide-solution') === true;
+  board.terms[i]?.tags.some(
+    (tag) =>
+      tag.startsWith('additive:') && tag !== 'additive:none' && tag !== 'additive:sulfur-dioxide-solution',
+  ) === true;
 
-const isSO2 = (board: Board, i: number): boolean => board.terms[i]?.tags.some((tag) => tag === 'label:so2' || tag === 'label:free' || tag === 'label:total') === true;
+const isSO2 = (board: Board, i: number): boolean =>
+  board.terms[i]?.tags.some((tag) => tag === 'label:so2' || tag === 'label:free' || tag === 'label:total') ===
+  true;
 
 const isLabelled = (board: Board, i: number): boolean => {
   let k = i - 1;
-  while (isMark(board, k, ':') || isMark(board, k, '=') || isCue(board, k, 'is') || isCue(board, k, 'to') || isCue(board, k, 'target') || isMark(board, k, '->') || isMark(board, k, '→')) {
-    if (isCue(board, k, 'to') || isCue(board, k, 'target') || board.terms[k]?.text.includes('>') || board.terms[k]?.text === '→') return true;
+  while (
+    isMark(board, k, ':') ||
+    isMark(board, k, '=') ||
+    isCue(board, k, 'is') ||
+    isCue(board, k, 'to') ||
+    isCue(board, k, 'target') ||
+    isMark(board, k, '->') ||
+    isMark(board, k, '→')
+  ) {
+    if (
+      isCue(board, k, 'to') ||
+      isCue(board, k, 'target') ||
+      board.terms[k]?.text.includes('>') ||
+      board.terms[k]?.text === '→'
+    )
+      return true;
     k--;
   }
   return board.terms[k]?.tags.some((tag) => tag.startsWith('label:') && tag !== 'label:so2') === true;
@@ -26,9 +45,23 @@ export function findPowderOrSO2(board: Board): void {
     if (!unit || isLabelled(board, i)) continue;
     const after = isCue(board, unit.to + 1, 'of') ? unit.to + 2 : unit.to + 1;
     const before = isMark(board, i - 1, ':') ? i - 2 : i - 1;
-    const beside = isAdditive(board, after) || (isAdditive(board, before) && !isSO2(board, after) && !isCue(board, after, 'addition'));
-    const perHectolitre = unit.id === 'g/hL' && (!isSO2(board, after) || (after === unit.to + 1 && board.terms[after]?.tags.includes('label:so2') === true && !holdsCue(board, 'add') && !holdsCue(board, 'past')));
+    const beside =
+      isAdditive(board, after) ||
+      (isAdditive(board, before) && !isSO2(board, after) && !isCue(board, after, 'addition'));
+    const perHectolitre =
+      unit.id === 'g/hL' &&
+      (!isSO2(board, after) ||
+        (after === unit.to + 1 &&
+          board.terms[after]?.tags.includes('label:so2') === true &&
+          !holdsCue(board, 'add') &&
+          !holdsCue(board, 'past')));
     const perLitre = unit.id === 'g/L' && (isAdditive(board, after) || isAdditive(board, before));
-    if (beside || perHectolitre || perLitre) refuse(board, 'ambiguous-number', i, Math.max(unit.to, beside && isAdditive(board, after) ? after : unit.to));
+    if (beside || perHectolitre || perLitre)
+      refuse(
+        board,
+        'ambiguous-number',
+        i,
+        Math.max(unit.to, beside && isAdditive(board, after) ? after : unit.to),
+      );
   }
 }

@@ -1,6 +1,7 @@
 import type { Board } from '../board.ts';
-import { claim, figureAt, find, hasTag, isCue, isFree, isMark, refuse } from '../board.ts';
+import { claim, figureAt, find, hasTag, isCue, isFound, isFree, isMark, refuse } from '../board.ts';
 import type { UnitId } from '../words/words.ts';
+import type { UnitAt } from '../units.ts';
 import { VOLUME_UNITS, concentrationAt, unitAt } from '../units.ts';
 import { USUAL_BARREL_L, litresOf } from './barrels.ts';
 import { gramsOf } from './mass.ts';
@@ -12,17 +13,25 @@ const isPer = (board: Board, i: number): boolean => isMark(board, i, '/') || isC
 /** Where "per" stands after a mass, past the additive's name (`1 g kmbs per 10 L`). */
 function perAfter(board: Board, i: number): number | undefined {
   let k = i;
-  while (k < i + 3 && (isCue(board, k, 'of') || board.terms[k]?.tags.some((tag) => tag.startsWith('additive')) === true)) k++;
+  while (
+    k < i + 3 &&
+    (isCue(board, k, 'of') || board.terms[k]?.tags.some((tag) => tag.startsWith('additive')) === true)
+  )
+    k++;
   return isPer(board, k) ? k : undefined;
 }
 
 /** What the rate is per: litres, or fruit by weight. */
-function baseAt(board: Board, i: number): { litres?: number; fruit?: true; unsure?: true; to: number } | undefined {
+function baseAt(
+  board: Board,
+  i: number,
+): { litres?: number; fruit?: true; unsure?: true; to: number } | undefined {
   const figure = isFree(board, i) ? figureAt(board, i) : undefined;
   const at = figure ? i + 1 : i;
   if (hasTag(board, at, 'vessel:barrel')) return { litres: (figure?.value ?? 1) * USUAL_BARREL_L, to: at };
   const term = board.terms[at];
-  if (figure && term?.text === 'g' && term.capital && [60, 1000].includes(figure.value)) return { unsure: true, to: at };
+  if (figure && term?.text === 'g' && term.capital && [60, 1000].includes(figure.value))
+    return { unsure: true, to: at };
   const mass = unitAt(board, at, ['kg', 'ton', 'quintal', 'lb']);
   if (mass) return { fruit: true, to: mass.to };
   const volume = unitAt(board, at, VOLUME_UNITS);
@@ -30,19 +39,39 @@ function baseAt(board: Board, i: number): { litres?: number; fruit?: true; unsur
   return { litres: (figure?.value ?? 1) * litresOf(board, volume.id), to: volume.to };
 }
 
+/** `40 g per barrel`: a mass for a usual barrel; with a volume beside it, nobody knows of which. */
+function findPerBarrel(board: Board, i: number, unit: UnitAt): void {
+  if (
+    isFound(board, 'vessels') ||
+    board.cues.has('unit:L') ||
+    board.cues.has('unit:gal') ||
+    board.terms.some(
+      (_, k) => board.terms[k + 1] !== undefined && isFree(board, k) && hasTag(board, k + 1, 'vessel:barrel'),
+    )
+  )
+    return refuse(board, 'ambiguous-number', i, unit.to + 1);
+  board.marks.barrelsAssumed_L = USUAL_BARREL_L;
+  board.marks.volumeUnit ??= 'barrel';
+  claim(board, unit.to + 1, unit.to + 1);
+}
+
 function findRateAt(board: Board, i: number): void {
   const unit = unitAt(board, i + 1, MASSES);
   if (!unit || concentrationAt(board, i + 1)) return;
+  if (isCue(board, unit.to + 1, 'each') && /barrel|bbl/.test(board.terms[unit.to + 1]!.text))
+    return findPerBarrel(board, i, unit);
   const per = perAfter(board, unit.to + 1);
   const base = per === undefined ? undefined : baseAt(board, per + 1);
   if (per === undefined || base === undefined) return;
   const { value, unsure } = figureAt(board, i);
   if (unsure || base.unsure) return refuse(board, 'ambiguous-number', i, base.to);
   const between = (from: number, to: number): void => {
-    for (let k = from; k <= to; k++) if (!board.terms[k]!.tags.some((tag) => tag.startsWith('additive'))) claim(board, k, k);
+    for (let k = from; k <= to; k++)
+      if (!board.terms[k]!.tags.some((tag) => tag.startsWith('additive'))) claim(board, k, k);
   };
   if (base.fruit) {
     board.marks.fruitByWeight = true;
+    board.marks.fruitRate = true;
     return between(i, base.to);
   }
   const rate = (value * gramsOf(unit.id) * 1000) / base.litres!;

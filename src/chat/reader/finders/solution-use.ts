@@ -13,7 +13,9 @@ function isInWater(board: Board): boolean {
   return board.terms.some(
     (_, i) =>
       isCue(board, i, 'water') &&
-      board.terms.slice(Math.max(0, i - 4), i).some((term, k, before) => isCue(board, i - before.length + k, 'in') || term.kind === 'number'),
+      board.terms
+        .slice(Math.max(0, i - 4), i)
+        .some((term, k, before) => isCue(board, i - before.length + k, 'in') || term.kind === 'number'),
   );
 }
 
@@ -21,5 +23,10 @@ function isInWater(board: Board): boolean {
 export function findSolutionUse(board: Board): void {
   if (holdsCue(board, 'holding')) board.marks.solutionUse = 'holding';
   else if (holdsCue(board, 'cleaning') && !speaksOfWine(board)) board.marks.solutionUse = 'cleaning';
-  else if (!speaksOfWine(board) && !holdsCue(board, 'past') && (isInWater(board) || holdsCue(board, 'make-up'))) board.marks.solutionUse = 'make-up';
+  else if (
+    !speaksOfWine(board) &&
+    !holdsCue(board, 'past') &&
+    (isInWater(board) || holdsCue(board, 'make-up'))
+  )
+    board.marks.solutionUse = 'make-up';
 }

@@ -5,7 +5,8 @@ import { claim, find, hasTag, isCue, isMark } from '../board.ts';
 const STAGES: readonly Stage[] = ['fermenting', 'malolactic', 'must', 'base', 'bottled', 'finished'];
 
 const isLabelled = (board: Board, i: number): boolean =>
-  board.terms[i]?.tags.some((tag) => tag === 'label:ph' || tag === 'label:free' || tag === 'label:total') === true;
+  board.terms[i]?.tags.some((tag) => tag === 'label:ph' || tag === 'label:free' || tag === 'label:total') ===
+  true;
 
 /** `350 mL` is a volume; `free 20 ML done` and `ML done` are not. */
 function isUnit(board: Board, i: number): boolean {
@@ -16,24 +17,33 @@ function isUnit(board: Board, i: number): boolean {
 }
 
 function malolacticAt(board: Board, i: number): Stage | undefined {
-  if (isMark(board, i + 1, '?') || isMark(board, i + 2, '?')) return isCue(board, i + 1, 'over') ? 'malolactic' : undefined;
+  if (isMark(board, i + 1, '?') || isMark(board, i + 2, '?'))
+    return isCue(board, i + 1, 'over') ? 'malolactic' : undefined;
   if (isCue(board, i + 1, 'yet') || isCue(board, i + 1, 'ml-bugs')) return 'malolactic';
   if (isCue(board, i - 1, 'ml-around')) return 'malolactic';
-  if (isCue(board, i - 1, 'ml-over') || isCue(board, i - 1, 'ml-without') || isCue(board, i + 1, 'over')) return 'finished';
+  if (isCue(board, i - 1, 'ml-over') || isCue(board, i - 1, 'ml-without') || isCue(board, i + 1, 'over'))
+    return 'finished';
   return 'malolactic';
 }
 
 /** `must` is juice only as a noun: not in "I must", "must be". */
 function isNounMust(board: Board, i: number): boolean {
   if (board.terms[i]?.text !== 'must') return true;
-  if (isCue(board, i + 1, 'verb') && !isCue(board, i + 1, 'plain') && !hasTag(board, i + 1, 'unit:none-of-ours')) return false;
-  if (isCue(board, i + 1, 'verb') || (isCue(board, i - 1, 'pronoun') && !isCue(board, i - 1, 'article'))) return false;
+  if (
+    isCue(board, i + 1, 'verb') &&
+    !isCue(board, i + 1, 'plain') &&
+    !hasTag(board, i + 1, 'unit:none-of-ours')
+  )
+    return false;
+  if (isCue(board, i + 1, 'verb') || (isCue(board, i - 1, 'pronoun') && !isCue(board, i - 1, 'article')))
+    return false;
   return true;
 }
 
 function stopsFerment(board: Board, i: number): boolean {
   if (!isCue(board, i, 'stop')) return false;
-  for (let k = i + 1; k <= i + 4; k++) if (isCue(board, k, 'ferment') || hasTag(board, k, 'stage:fermenting')) return true;
+  for (let k = i + 1; k <= i + 4; k++)
+    if (isCue(board, k, 'ferment') || hasTag(board, k, 'stage:fermenting')) return true;
   return false;
 }
 
@@ -56,7 +66,8 @@ export function findStage(board: Board): void {
     } else {
       const stage = STAGES.find((one) => hasTag(board, i, `stage:${one}`));
       const counted = board.terms[i - 1]?.kind === 'number' && hasTag(board, i, 'vessel:cask');
-      if (stage && !counted && !(stage === 'must' && !isNounMust(board, i))) find(board, 'stage', stage, 'labelled', i, i);
+      if (stage && !counted && !(stage === 'must' && !isNounMust(board, i)))
+        find(board, 'stage', stage, 'labelled', i, i);
     }
   }
 }

@@ -7,7 +7,9 @@ import { unitAt } from '../units.ts';
 const LARGEST_PLAIN_TABLET_g = 2;
 
 const isCampden = (board: Board, i: number): boolean =>
-  hasTag(board, i, 'additive:campden') || hasTag(board, i, 'additive:campden-potassium') || hasTag(board, i, 'additive:campden-sodium');
+  hasTag(board, i, 'additive:campden') ||
+  hasTag(board, i, 'additive:campden-potassium') ||
+  hasTag(board, i, 'additive:campden-sodium');
 
 /** The salt that stands beside a plain tablet. */
 function saltNear(board: Board, i: number): AdditiveId | undefined {
@@ -38,7 +40,14 @@ function sizeNear(board: Board, i: number): { grams: number; from: number; to: n
   return undefined;
 }
 
-const skipTimes = (board: Board, i: number): number => (isMark(board, i, '×') || isMark(board, i, '*') || board.terms[i]?.text === 'x' || isCue(board, i, 'effervescent') || hasTag(board, i, 'label:so2') ? i - 1 : i);
+const skipTimes = (board: Board, i: number): number =>
+  isMark(board, i, '×') ||
+  isMark(board, i, '*') ||
+  board.terms[i]?.text === 'x' ||
+  isCue(board, i, 'effervescent') ||
+  hasTag(board, i, 'label:so2')
+    ? i - 1
+    : i;
 
 /** The number of tablets that ends at term `i`, if one does. */
 function countBefore(board: Board, i: number): number | undefined {
@@ -49,21 +58,25 @@ function countBefore(board: Board, i: number): number | undefined {
 function findCampden(board: Board, i: number): void {
   board.marks.campden = true;
   const size = sizeNear(board, i);
-  const count = countBefore(board, i - 1) ?? (size && size.from < i ? countBefore(board, size.from - 1) : undefined);
+  const count =
+    countBefore(board, i - 1) ?? (size && size.from < i ? countBefore(board, size.from - 1) : undefined);
   const after = isFree(board, i + 2) && board.terms[i + 1]?.text === 'x' ? i + 2 : undefined;
   const salt = saltNear(board, i);
   if (salt) find(board, 'additive', salt, 'labelled', i, i);
   claim(board, i, i);
-  if (size && size.grams > 0 && size.grams <= LARGEST_PLAIN_TABLET_g) find(board, 'tablet_salt_g', size.grams, 'unit', size.from, size.to);
+  if (size && size.grams > 0 && size.grams <= LARGEST_PLAIN_TABLET_g)
+    find(board, 'tablet_salt_g', size.grams, 'unit', size.from, size.to);
   const counted = count ?? after;
   if (counted !== undefined) find(board, 'tablets', figureAt(board, counted).value, 'unit', counted, counted);
 }
 
 function findEffervescent(board: Board, i: number): void {
   const size = sizeNear(board, i);
-  const count = countBefore(board, i - 1) ?? (size && size.from < i ? countBefore(board, size.from - 1) : undefined);
+  const count =
+    countBefore(board, i - 1) ?? (size && size.from < i ? countBefore(board, size.from - 1) : undefined);
   find(board, 'additive', 'tablet', 'labelled', i, i);
-  for (const k of [i - 1, i + 1]) if (isCue(board, k, 'effervescent') || hasTag(board, k, 'label:so2')) claim(board, k, k);
+  for (const k of [i - 1, i + 1])
+    if (isCue(board, k, 'effervescent') || hasTag(board, k, 'label:so2')) claim(board, k, k);
   const tablets = count === undefined ? undefined : figureAt(board, count).value;
   if (size) find(board, 'tablet_SO2_g', size.grams, 'unit', size.from, size.to);
   else board.marks.tabletsOfUnknownSize = true;
@@ -84,17 +97,23 @@ export function findTablets(board: Board): void {
   const campden = board.terms.findIndex((_, i) => board.taken[i] !== true && isCampden(board, i));
   if (campden >= 0) {
     findCampden(board, campden);
-    for (let i = 0; i < board.terms.length; i++) if (isCue(board, i, 'tablet') || isCampden(board, i)) claim(board, i, i);
+    for (let i = 0; i < board.terms.length; i++)
+      if (isCue(board, i, 'tablet') || isCampden(board, i)) claim(board, i, i);
     return;
   }
   for (let i = 0; i < board.terms.length; i++) {
     if (board.taken[i] === true) continue;
     if (isCue(board, i, 'sachet')) findSachet(board, i);
     else if (isCue(board, i, 'tablet')) {
-      const ofSalt = [i - 1, i + 1].some((k) => hasTag(board, k, 'additive:potassium-metabisulfite') || hasTag(board, k, 'additive:sodium-metabisulfite'));
+      const ofSalt = [i - 1, i + 1].some(
+        (k) =>
+          hasTag(board, k, 'additive:potassium-metabisulfite') ||
+          hasTag(board, k, 'additive:sodium-metabisulfite'),
+      );
       if (ofSalt) findCampden(board, i);
       else findEffervescent(board, i);
       return;
-    } else if (isCue(board, i, 'effervescent') && !board.terms.some((_, k) => isCue(board, k, 'tablet'))) findEffervescent(board, i);
+    } else if (isCue(board, i, 'effervescent') && !board.terms.some((_, k) => isCue(board, k, 'tablet')))
+      findEffervescent(board, i);
   }
 }

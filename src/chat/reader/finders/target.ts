@@ -51,16 +51,25 @@ function aimAt(board: Board, i: number): Aim | undefined {
   const next = isCue(board, to + 1, 'of') ? to + 2 : to + 1;
   const joined = board.terms[next]?.kind === 'word';
   const kind = joined ? kindAt(board, next) : undefined;
-  const isNextLabel = (kind === 'free' || kind === 'total' || kind === 'ph') && isFree(board, next + 1) && !isOther(board, next + 2);
+  const isNextLabel =
+    (kind === 'free' || kind === 'total' || kind === 'ph') &&
+    isFree(board, next + 1) &&
+    !isOther(board, next + 2);
   if (kind !== undefined && !isNextLabel) to = next;
   else if (hasTag(board, to + 1, 'label:so2') && !isFree(board, to + 2)) to += 1;
   if (kind === 'molecular' && hasTag(board, to + 1, 'label:so2')) to += 1;
   const { value } = decimalAt(board, i);
-  return { mg_L: value * (unit ? (mg_L_IN[unit.id] ?? 1) : 1), ...(kind && !isNextLabel ? { kind } : {}), from: i, to };
+  return {
+    mg_L: value * (unit ? (mg_L_IN[unit.id] ?? 1) : 1),
+    ...(kind && !isNextLabel ? { kind } : {}),
+    from: i,
+    to,
+  };
 }
 
 function targetOf(aim: Aim): Target {
-  const molecular = aim.kind === 'molecular' || (aim.kind === undefined && aim.mg_L <= MOST_BARE_MOLECULAR_mg_L);
+  const molecular =
+    aim.kind === 'molecular' || (aim.kind === undefined && aim.mg_L <= MOST_BARE_MOLECULAR_mg_L);
   return molecular ? { molecular_mg_L: aim.mg_L } : { free_mg_L: aim.mg_L };
 }
 
@@ -72,7 +81,8 @@ function keepTarget(board: Board, aim: Aim, from: number, labelled?: Aim['kind']
 }
 
 function keepAddition(board: Board, aim: Aim, from: number): void {
-  if (aim.kind === 'molecular' || aim.kind === 'total' || aim.kind === 'ph') return refuse(board, 'ambiguous-number', from, aim.to);
+  if (aim.kind === 'molecular' || aim.kind === 'total' || aim.kind === 'ph')
+    return refuse(board, 'ambiguous-number', from, aim.to);
   if (aim.mg_L < 0) return refuse(board, 'negative-value', from, aim.to);
   if (board.pastTense) return find(board, 'added_mg_L', aim.mg_L, 'labelled', from, aim.to);
   find(board, 'target', { add_mg_L: aim.mg_L }, 'labelled', from, aim.to);
@@ -80,11 +90,22 @@ function keepAddition(board: Board, aim: Aim, from: number): void {
 
 const skipJoins = (board: Board, i: number): number => {
   let k = i;
-  while (isMark(board, k, ':') || isMark(board, k, '=') || isMark(board, k, '~') || isCue(board, k, 'is') || isCue(board, k, 'of') || isCue(board, k, 'to') || isCue(board, k, 'article')) k++;
+  while (
+    k < i + 4 &&
+    (isMark(board, k, ':') ||
+      isMark(board, k, '=') ||
+      isMark(board, k, '~') ||
+      isCue(board, k, 'is') ||
+      isCue(board, k, 'of') ||
+      isCue(board, k, 'to') ||
+      isCue(board, k, 'article'))
+  )
+    k++;
   return k;
 };
 
-const isArrow = (board: Board, i: number): boolean => isMark(board, i, '->') || isMark(board, i, '=>') || isMark(board, i, '→');
+const isArrow = (board: Board, i: number): boolean =>
+  isMark(board, i, '->') || isMark(board, i, '=>') || isMark(board, i, '→');
 
 /** `from 18 to 32`, `free 18 to 32`, `18 -> 32`: where it is and where it should go. */
 function findWay(board: Board, i: number): boolean {
@@ -95,7 +116,8 @@ function findWay(board: Board, i: number): boolean {
   if (!arrow && !isCue(board, joint, 'to')) return false;
   const second = aimAt(board, skipJoins(board, joint + 1));
   if (!second) return false;
-  const labelAt = isMark(board, i - 1, ':') || isMark(board, i - 1, '=') || isCue(board, i - 1, 'is') ? i - 2 : i - 1;
+  const labelAt =
+    isMark(board, i - 1, ':') || isMark(board, i - 1, '=') || isCue(board, i - 1, 'is') ? i - 2 : i - 1;
   const before = kindAt(board, labelAt);
   if (before === 'ph' || before === 'molecular') {
     refuse(board, 'ambiguous-number', i, second.to);
@@ -108,7 +130,14 @@ function findWay(board: Board, i: number): boolean {
     keepTarget(board, second, joint);
     return true;
   }
-  if (before === 'total' || second.kind === 'total' || (!arrow && !said && Math.abs(second.mg_L - first.mg_L) < SMALLEST_CLEAR_STEP_mg_L && second.mg_L > MOST_BARE_MOLECULAR_mg_L)) {
+  if (
+    before === 'total' ||
+    second.kind === 'total' ||
+    (!arrow &&
+      !said &&
+      Math.abs(second.mg_L - first.mg_L) < SMALLEST_CLEAR_STEP_mg_L &&
+      second.mg_L > MOST_BARE_MOLECULAR_mg_L)
+  ) {
     refuse(board, 'ambiguous-number', i, second.to);
     return true;
   }
@@ -122,10 +151,16 @@ function findMolecular(board: Board, i: number): void {
   const states = ['is', 'was', 'now', 'reads'].includes(board.terms[i + 1]?.text ?? '');
   const at = skipJoins(board, i + 1);
   const after = isFree(board, at) && !isOther(board, at + 1) ? at : undefined;
-  const unit = board.terms[i - 1]?.tags.some((tag) => tag === 'unit:ppm' || tag === 'unit:mg/L') ? i - 2 : i - 1;
+  const unit = board.terms[i - 1]?.tags.some((tag) => tag === 'unit:ppm' || tag === 'unit:mg/L')
+    ? i - 2
+    : i - 1;
   const before = isFree(board, unit) ? unit : undefined;
   const both = after !== undefined && before !== undefined;
-  const chosen = both ? (decimalAt(board, before).value <= MOST_BARE_MOLECULAR_mg_L ? before : after) : (before ?? after);
+  const chosen = both
+    ? decimalAt(board, before).value <= MOST_BARE_MOLECULAR_mg_L
+      ? before
+      : after
+    : (before ?? after);
   if (chosen === undefined) return;
   const aim = aimAt(board, chosen);
   if (!aim) return;
@@ -152,9 +187,12 @@ function findVerb(board: Board, i: number): void {
   if (isCue(board, i, 'need')) {
     const more = isCue(board, aim.to + 1, 'addition') || isCue(board, aim.to + 1, 'past');
     if (more) return keepAddition(board, { ...aim, to: aim.to + 1 }, i);
-    return isPlain || label === undefined && aim.kind === undefined ? refuse(board, 'ambiguous-number', i, aim.to) : keepTarget(board, aim, i, label);
+    return isPlain || (label === undefined && aim.kind === undefined)
+      ? refuse(board, 'ambiguous-number', i, aim.to)
+      : keepTarget(board, aim, i, label);
   }
-  if (isCue(board, i, 'add') || isCue(board, i, 'raise') || isCue(board, i, 'by')) return keepAddition(board, aim, i);
+  if (isCue(board, i, 'add') || isCue(board, i, 'raise') || isCue(board, i, 'by'))
+    return keepAddition(board, aim, i);
   const isPlainTo = aim.kind === undefined && label === undefined && !concentrationAt(board, aim.from + 1);
   if (isPlainTo && !isCellarTalk(board)) return;
   if (isCue(board, i, 'to')) keepTarget(board, aim, i, label);
@@ -162,14 +200,19 @@ function findVerb(board: Board, i: number): void {
 
 const isVerb = (board: Board, i: number): boolean =>
   isArrow(board, i) ||
-  (isCue(board, i, 'by') && holdsCue(board, 'raise')) || (['target', 'add', 'raise', 'need', 'to'] as const).some((cue) => isCue(board, i, cue));
+  (isCue(board, i, 'by') && holdsCue(board, 'raise')) ||
+  (['target', 'add', 'raise', 'need', 'to'] as const).some((cue) => isCue(board, i, cue));
 
 /** Finds what is aimed at: a level of free or molecular SO2, or a stated addition. */
 export function findTarget(board: Board): void {
   for (let i = 0; i < board.terms.length; i++) if (isFree(board, i)) findWay(board, i);
   for (let i = 0; i < board.terms.length; i++) {
     if (board.taken[i] === true) continue;
-    if (isMark(board, i, '+') && board.terms[i + 1]?.gap === false && !(board.terms[i - 1]?.kind === 'number')) {
+    if (
+      isMark(board, i, '+') &&
+      board.terms[i + 1]?.gap === false &&
+      (board.terms[i]!.gap || board.terms[i - 1]?.kind !== 'number')
+    ) {
       const aim = aimAt(board, i + 1);
       if (aim) keepAddition(board, aim, i);
     } else if (board.terms[i]!.kind !== 'number' && isVerb(board, i)) findVerb(board, i);
@@ -178,12 +221,14 @@ export function findTarget(board: Board): void {
     if (board.taken[i] !== true && isCue(board, i, 'molecular')) findMolecular(board, i);
     const aim = isFree(board, i) && concentrationAt(board, i + 1) ? aimAt(board, i) : undefined;
     if (!aim || aim.kind !== undefined || isLabelBefore(board, i)) continue;
-    if (isCue(board, aim.to + 1, 'addition') && !hasTag(board, aim.to + 1, 'label:total')) keepAddition(board, { ...aim, to: aim.to + 1 }, i);
+    if (isCue(board, aim.to + 1, 'addition') && !hasTag(board, aim.to + 1, 'label:total'))
+      keepAddition(board, { ...aim, to: aim.to + 1 }, i);
     else if (board.pastTense && !isFound(board, 'added_mg_L')) keepAddition(board, aim, i);
   }
 }
 
 const isLabelBefore = (board: Board, i: number): boolean => {
-  const k = isMark(board, i - 1, ':') || isMark(board, i - 1, '=') || isCue(board, i - 1, 'is') ? i - 2 : i - 1;
+  const k =
+    isMark(board, i - 1, ':') || isMark(board, i - 1, '=') || isCue(board, i - 1, 'is') ? i - 2 : i - 1;
   return board.terms[k]?.tags.some((tag) => tag.startsWith('label:') && tag !== 'label:so2') === true;
 };

@@ -42,29 +42,47 @@ const kindOf = (board: Board, i: number): string | undefined => {
 /** `tank 4`, `tank #4`, `tank no. 4`, `barrel 17`, `tank B`. */
 function worded(board: Board, i: number): Named | undefined {
   const kind = kindOf(board, i);
-  if (kind === undefined || (board.terms[i]!.text === 'stuck' && board.terms[i - 1]?.kind !== 'number')) return undefined;
+  if (kind === undefined || (board.terms[i]!.text === 'stuck' && board.terms[i - 1]?.kind !== 'number'))
+    return undefined;
   let k = i + 1;
-  while (isMark(board, k, '#') || isMark(board, k, '-') || isMark(board, k, ':') || isMark(board, k, '.') || isMark(board, k, "'") || isCue(board, k, 'number-sign')) k++;
+  while (
+    isMark(board, k, '#') ||
+    isMark(board, k, '-') ||
+    isMark(board, k, ':') ||
+    isMark(board, k, '.') ||
+    isMark(board, k, "'") ||
+    isCue(board, k, 'number-sign')
+  )
+    k++;
   if (k > i + 3) return undefined;
   if (isWholeAt(board, k) && !hasOwnUnit(board, k)) {
-    if (isMark(board, k + 1, 'x') || board.terms[k + 1]?.text === 'x' || isMark(board, k + 1, '×')) return undefined;
+    if (isMark(board, k + 1, 'x') || board.terms[k + 1]?.text === 'x' || isMark(board, k + 1, '×'))
+      return undefined;
     const { letter, to } = suffix(board, k);
     const number = Number(board.terms[k]!.text);
     return { name: `${kind} ${number}${letter}`, kind, ...(letter ? {} : { number }), from: i, to };
   }
   const single = board.terms[i + 1];
-  if (kind === 'tank' && single?.kind === 'word' && /^[b-z]$/.test(single.text) && single.capital && board.terms[i + 2]?.kind !== 'number') {
+  if (
+    kind === 'tank' &&
+    single?.kind === 'word' &&
+    /^[b-z]$/.test(single.text) &&
+    single.capital &&
+    board.terms[i + 2]?.kind !== 'number'
+  ) {
     return { name: `tank ${single.text.toUpperCase()}`, kind, from: i, to: i + 1 };
   }
   return undefined;
 }
 
-const NO_CODE = /^(label:(?!so2)|cue:(target|to|from|raise|up|add|need|in|of|with|by|and|per|is|molecular|lot|binding|number-sign|month|not|correction|size|past|over|at)|unit:(none|ppm)|additive|stage|style|organic|category)/;
+const NO_CODE =
+  /^(label:(?!so2)|cue:(target|to|from|raise|up|add|need|in|of|with|by|and|per|is|molecular|lot|binding|number-sign|month|not|correction|size|past|over|at)|unit:(none|ppm)|additive|stage|style|organic|category)/;
 
 /** `T4`, `T-4`, `FV3`, `B17`: letters and a whole number with nothing between but a hyphen. */
 function coded(board: Board, i: number): Named | undefined {
   const word = board.terms[i]!;
-  if (!/^[a-z]{1,4}$/.test(word.text) || (board.terms[i - 1]?.kind === 'number' && !word.gap)) return undefined;
+  if (!/^[a-z]{1,4}$/.test(word.text) || (board.terms[i - 1]?.kind === 'number' && !word.gap))
+    return undefined;
   const hyphen = isMark(board, i + 1, '-') && board.terms[i + 1]!.gap === false;
   const k = hyphen ? i + 2 : i + 1;
   if (!isWholeAt(board, k)) return undefined;
@@ -74,7 +92,13 @@ function coded(board: Board, i: number): Named | undefined {
   const tank = word.text === 't' || hasTag(board, i, 'vessel:tank');
   const barrel = hasTag(board, i, 'vessel:barrel');
   const single = word.text.length === 1;
-  if (!tank && !barrel && word.tags.some((tag) => (single ? /^(cue:(in|of|with)|label)/ : NO_CODE).test(tag)) && word.text !== 'b') return undefined;
+  if (
+    !tank &&
+    !barrel &&
+    word.tags.some((tag) => (single ? /^(cue:(in|of|with)|label)/ : NO_CODE).test(tag)) &&
+    word.text !== 'b'
+  )
+    return undefined;
   if (word.text === 'x' || (hasOwnUnit(board, k) && !glued)) return undefined;
   if (glued && !hyphen && single && hasOwnUnit(board, k) && isMark(board, k + 1, '/')) return undefined;
   const { letter, to } = suffix(board, k);
@@ -87,14 +111,24 @@ function coded(board: Board, i: number): Named | undefined {
 /** `B1-B24`, `barrels 12 to 24`: the last vessel of the range, when one follows. */
 function rangeEnd(board: Board, first: Named): { number: number; to: number } | undefined {
   const k = first.to + 1;
-  const joins = isMark(board, k, '-') || isCue(board, k, 'to') || isCue(board, k, 'joined') || (isMark(board, k, '.') && isMark(board, k + 1, '.'));
+  const joins =
+    isMark(board, k, '-') ||
+    isCue(board, k, 'to') ||
+    isCue(board, k, 'joined') ||
+    (isMark(board, k, '.') && isMark(board, k + 1, '.'));
   const isMinus = isMark(board, k, '-') && board.terms[k]!.gap && board.terms[k + 1]?.gap === false;
   if (!joins || isMinus || first.number === undefined) return undefined;
   const at = isMark(board, k, '.') ? k + 2 : k + 1;
   const second = worded(board, at) ?? (board.terms[at]?.kind === 'word' ? coded(board, at) : undefined);
-  if (second?.number !== undefined && second.kind === first.kind) return { number: second.number, to: second.to };
+  if (second?.number !== undefined && second.kind === first.kind)
+    return { number: second.number, to: second.to };
   const plural = /s$/.test(board.terms[first.from]!.text) || isMark(board, k, '-');
-  if (plural && isWholeAt(board, at) && !hasOwnUnit(board, at) && (kindOf(board, first.from) !== undefined || board.terms[at]!.gap === false)) {
+  if (
+    plural &&
+    isWholeAt(board, at) &&
+    !hasOwnUnit(board, at) &&
+    (kindOf(board, first.from) !== undefined || board.terms[at]!.gap === false)
+  ) {
     return { number: Number(board.terms[at]!.text), to: at };
   }
   return undefined;
@@ -106,8 +140,17 @@ function findRange(board: Board, first: Named, last: { number: number; to: numbe
     refuse(board, 'ambiguous-number', first.from, last.to);
     return;
   }
-  const prefix = /^(tank|barrel|[A-Z]+ )/.test(first.name) ? `${first.name.slice(0, first.name.lastIndexOf(String(from)))}` : first.kind;
-  find(board, 'vessels', Array.from({ length: last.number - from + 1 }, (_, k) => `${prefix}${from + k}`), 'labelled', first.from, last.to);
+  const prefix = /^(tank|barrel|[A-Z]+ )/.test(first.name)
+    ? `${first.name.slice(0, first.name.lastIndexOf(String(from)))}`
+    : first.kind;
+  find(
+    board,
+    'vessels',
+    Array.from({ length: last.number - from + 1 }, (_, k) => `${prefix}${from + k}`),
+    'labelled',
+    first.from,
+    last.to,
+  );
 }
 
 /** Finds the vessel: a tank or barrel word with its number, or a code; `B1-B24` is that many vessels. */

@@ -13,7 +13,9 @@ interface VolumeAt {
 
 function volumeAt(board: Board, i: number): VolumeAt | undefined {
   if (!isFree(board, i)) return undefined;
-  const thousand = isCue(board, i + 1, 'thousand') && (board.terms[i + 1]!.gap === false || board.terms[i + 1]!.text !== 'k');
+  const thousand =
+    isCue(board, i + 1, 'thousand') &&
+    (board.terms[i + 1]!.gap === false || board.terms[i + 1]!.text !== 'k');
   const unit = unitAt(board, thousand ? i + 2 : i + 1, VOLUME_UNITS);
   if (!unit) return undefined;
   const figure = figureAt(board, i);
@@ -23,7 +25,12 @@ function volumeAt(board: Board, i: number): VolumeAt | undefined {
 /** `6+6+4 gal`: the terms of a sum that one unit closes. */
 function sumStart(board: Board, i: number): number {
   let from = i;
-  while (isMark(board, from - 1, '+') && isFree(board, from - 2) && !(board.terms[from - 1]!.gap && !board.terms[from]!.gap)) from -= 2;
+  while (
+    isMark(board, from - 1, '+') &&
+    isFree(board, from - 2) &&
+    !(board.terms[from - 1]!.gap && !board.terms[from]!.gap)
+  )
+    from -= 2;
   return from;
 }
 
@@ -42,7 +49,7 @@ function bracketEnd(board: Board, i: number): number | undefined {
 }
 
 const isRange = (board: Board, i: number): boolean =>
-  (isMark(board, i - 1, '-') || isCue(board, i - 1, 'to') || (isCue(board, i - 1, 'joined'))) &&
+  (isMark(board, i - 1, '-') || isCue(board, i - 1, 'to') || isCue(board, i - 1, 'joined')) &&
   isFree(board, i - 2) &&
   !(isMark(board, i - 1, '-') && board.terms[i - 1]!.gap);
 
@@ -77,9 +84,17 @@ function findVolumeAt(board: Board, i: number): number {
   const to = bracket ?? volume.unit.to;
   const before = findingOf(board, 'volume_L');
   find(board, 'volume_L', litres, 'unit', start < i ? start : volume.figure.from, to);
-  if (start < i) board.notes.push({ id: 'volume-sum', text: board.message.slice(board.folded.at[board.terms[start]!.start], board.folded.at[board.terms[to]!.end]) });
+  if (start < i)
+    board.notes.push({
+      id: 'volume-sum',
+      text: board.message.slice(
+        board.folded.at[board.terms[start]!.start],
+        board.folded.at[board.terms[to]!.end],
+      ),
+    });
   if (isCue(board, to + 1, 'each')) board.marks.statedEach = true;
-  if (isCue(board, to + 1, 'altogether') || (hasTag(board, to + 1, 'label:total') && !isFree(board, to + 2))) board.marks.statedTotal = true;
+  if (isCue(board, to + 1, 'altogether') || (hasTag(board, to + 1, 'label:total') && !isFree(board, to + 2)))
+    board.marks.statedTotal = true;
   const isSame = before !== undefined && Math.abs(before.value - litres) <= 0.01 * before.value;
   if (isSame) board.findings.splice(board.findings.length - 1, 1);
   return to;

@@ -28,7 +28,8 @@ const targetFigure = (target: Target): readonly [number, number] => {
 };
 
 function problemOf({ field, value }: Finding): ProblemCode | undefined {
-  if (field === 'ph') return (value as number) >= 2.5 && (value as number) <= 4.8 ? undefined : 'ph-out-of-range';
+  if (field === 'ph')
+    return (value as number) >= 2.5 && (value as number) <= 4.8 ? undefined : 'ph-out-of-range';
   if (field === 'target') {
     const [figure, most] = targetFigure(value as Target);
     return figure > most ? 'value-out-of-range' : undefined;

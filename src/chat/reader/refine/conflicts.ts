@@ -4,7 +4,8 @@ import { findingOf, placeOf } from '../board.ts';
 import type { FieldName } from '../understood.ts';
 
 const drop = (board: Board, fields: readonly FieldName[]): void => {
-  for (let i = board.findings.length - 1; i >= 0; i--) if (fields.includes(board.findings[i]!.field)) board.findings.splice(i, 1);
+  for (let i = board.findings.length - 1; i >= 0; i--)
+    if (fields.includes(board.findings[i]!.field)) board.findings.splice(i, 1);
 };
 
 const key = (finding: Finding): string => JSON.stringify(finding.value);
@@ -12,11 +13,17 @@ const key = (finding: Finding): string => JSON.stringify(finding.value);
 /** The same field twice with different values: named both times it is a conflict, bare it is unclear. */
 function settleTwice(board: Board): void {
   const byField = new Map<FieldName, Finding[]>();
-  for (const finding of board.findings) byField.set(finding.field, [...(byField.get(finding.field) ?? []), finding]);
+  for (const finding of board.findings)
+    byField.set(finding.field, [...(byField.get(finding.field) ?? []), finding]);
   for (const [field, findings] of byField) {
     if (findings.length < 2 || new Set(findings.map(key)).size === 1 || field === 'stage') continue;
-    const code: ProblemCode = findings.some(({ said }) => said === 'bare') ? 'ambiguous-number' : 'conflicting-values';
-    board.problems.push({ code, about: findings.map(({ from, to }) => placeOf(board, from, to).text).join(' / ') });
+    const code: ProblemCode = findings.some(({ said }) => said === 'bare')
+      ? 'ambiguous-number'
+      : 'conflicting-values';
+    board.problems.push({
+      code,
+      about: findings.map(({ from, to }) => placeOf(board, from, to).text).join(' / '),
+    });
     drop(board, [field]);
   }
 }
@@ -25,7 +32,10 @@ function settleTwice(board: Board): void {
 function settleTotal(board: Board): void {
   const [free, total] = [findingOf(board, 'free_mg_L'), findingOf(board, 'total_mg_L')];
   if (!free || !total || total.value >= free.value) return;
-  board.problems.push({ code: 'total-below-free', about: `${placeOf(board, free.from, free.to).text} / ${placeOf(board, total.from, total.to).text}` });
+  board.problems.push({
+    code: 'total-below-free',
+    about: `${placeOf(board, free.from, free.to).text} / ${placeOf(board, total.from, total.to).text}`,
+  });
   drop(board, ['free_mg_L', 'total_mg_L']);
 }
 

@@ -3,68 +3,133 @@ import { holdsCue, isCue, isFound, isMark } from '../board.ts';
 import type { Intent } from '../understood.ts';
 import { isCellarTalk } from './unlabelled.ts';
 
-const any = (board: Board, ...fields: readonly Parameters<typeof isFound>[1][]): boolean => fields.some((field) => isFound(board, field));
+const any = (board: Board, ...fields: readonly Parameters<typeof isFound>[1][]): boolean =>
+  fields.some((field) => isFound(board, field));
 
-const hasAmount = (board: Board): boolean => any(board, 'mass_g', 'additive_volume_mL', 'tablets') || board.marks.spoon === true;
-const hasVolume = (board: Board): boolean => any(board, 'volume_L') || board.marks.barrelsAssumed_L !== undefined || board.marks.castsWithoutSize === true;
-const hasAdditive = (board: Board): boolean => any(board, 'additive') || board.marks.unnamedAdditive === true || board.marks.campden === true;
+const hasAmount = (board: Board): boolean =>
+  any(board, 'mass_g', 'additive_volume_mL', 'tablets') || board.marks.spoon === true;
+const hasVolume = (board: Board): boolean =>
+  any(board, 'volume_L') ||
+  board.marks.barrelsAssumed_L !== undefined ||
+  board.marks.castsWithoutSize === true;
+const hasAdditive = (board: Board): boolean =>
+  any(board, 'additive') || board.marks.unnamedAdditive === true || board.marks.campden === true;
 const hasVessel = (board: Board): boolean => any(board, 'vessel', 'vessels');
 const isNegated = (board: Board): boolean => board.notes.some(({ id }) => id === 'negated');
 
-const refused = (board: Board, code: string): boolean => board.problems.some((problem) => problem.code === code);
+const refused = (board: Board, code: string): boolean =>
+  board.problems.some((problem) => problem.code === code);
 
 /** A solution in water: never a dose for wine. */
 function isSolution(board: Board): boolean {
   const { solutionUse } = board.marks;
   if (solutionUse === undefined) return false;
   if (solutionUse === 'holding') return true;
-  if (solutionUse === 'cleaning') return hasVolume(board) || hasAdditive(board) || hasAmount(board) || any(board, 'strength_percent');
-  const dissolved = board.findings.some(({ field, value }) => field === 'additive' && String(value).endsWith('-solution')) || any(board, 'strength_percent');
+  if (solutionUse === 'cleaning')
+    return hasVolume(board) || hasAdditive(board) || hasAmount(board) || any(board, 'strength_percent');
+  const dissolved =
+    board.findings.some(({ field, value }) => field === 'additive' && String(value).endsWith('-solution')) ||
+    any(board, 'strength_percent');
   const inWater = holdsCue(board, 'water');
-  return dissolved ? !hasAmount(board) || inWater : inWater && (hasAmount(board) || hasAdditive(board)) && hasVolume(board);
+  return dissolved
+    ? !hasAmount(board) || inWater
+    : inWater && (hasAmount(board) || hasAdditive(board)) && hasVolume(board);
 }
 
 function isAdded(board: Board): boolean {
   if (!board.pastTense) return false;
-  const said = hasAmount(board) || any(board, 'added_mg_L', 'rate_mg_L') || refused(board, 'unknown-additive') || refused(board, 'ambiguous-number');
+  const said =
+    hasAmount(board) ||
+    any(board, 'added_mg_L', 'rate_mg_L') ||
+    refused(board, 'unknown-additive') ||
+    refused(board, 'ambiguous-number');
   const isOnlyDone = !board.terms.some((term, i) => isCue(board, i, 'past') && term.text !== 'done');
-  return said || (hasAdditive(board) && !isOnlyDone) || (hasVessel(board) && !isOnlyDone && !any(board, 'ph', 'free_mg_L') && holdsSulfite(board));
+  return (
+    said ||
+    (hasAdditive(board) && !isOnlyDone) ||
+    (hasVessel(board) && !isOnlyDone && !any(board, 'ph', 'free_mg_L') && holdsSulfite(board))
+  );
 }
 
 const holdsSulfite = (board: Board): boolean => board.cues.has('label:so2') || board.cues.has('cue:addition');
 
 function isReading(board: Board): boolean {
-  return holdsCue(board, 'reading') && any(board, 'ph', 'free_mg_L', 'total_mg_L') && !any(board, 'target') && !holdsCue(board, 'how-much') && !hasAmount(board) && !isMark(board, board.terms.length - 1, '?');
+  return (
+    holdsCue(board, 'reading') &&
+    any(board, 'ph', 'free_mg_L', 'total_mg_L') &&
+    !any(board, 'target') &&
+    !holdsCue(board, 'how-much') &&
+    !hasAmount(board) &&
+    !isMark(board, board.terms.length - 1, '?')
+  );
 }
 
 function isEffect(board: Board): boolean {
-  if (any(board, 'rate_mg_L')) return true;
+  if (any(board, 'rate_mg_L') || board.marks.fruitRate) return true;
   if (!hasAmount(board)) return false;
-  const isBareMass = any(board, 'ph', 'free_mg_L', 'total_mg_L') && !hasVolume(board) && !hasAdditive(board) && !refused(board, 'unknown-additive');
+  const isBareMass =
+    any(board, 'ph', 'free_mg_L', 'total_mg_L') &&
+    !hasVolume(board) &&
+    !hasAdditive(board) &&
+    !refused(board, 'unknown-additive');
   return !isBareMass;
 }
 
 /** A question for an amount that names an additive or a vessel alone. */
 function asksForDose(board: Board): boolean {
-  const isAboutStock = ['left', 'stock', 'store', 'shelf', 'remaining', 'cost', 'costs'].some((word) => board.terms.some(({ text }) => text === word));
+  const isAboutStock = ['left', 'stock', 'store', 'shelf', 'remaining', 'cost', 'costs'].some((word) =>
+    board.terms.some(({ text }) => text === word),
+  );
   if (isAboutStock) return false;
-  if (holdsCue(board, 'how-much')) return hasAdditive(board) || (hasVessel(board) && board.terms.length <= 12);
-  const asked = isMark(board, board.terms.length - 1, '?') || board.terms.some((_, i) => isCue(board, i, 'in') && ['for', 'in', 'into', 'to'].includes(board.terms[i]!.text) && board.taken[i + 1] === true);
+  if (holdsCue(board, 'how-much'))
+    return hasAdditive(board) || (hasVessel(board) && board.terms.length <= 12);
+  const asked =
+    isMark(board, board.terms.length - 1, '?') ||
+    board.terms.some(
+      (_, i) =>
+        isCue(board, i, 'in') &&
+        ['for', 'in', 'into', 'to'].includes(board.terms[i]!.text) &&
+        board.taken[i + 1] === true,
+    );
   return hasAdditive(board) && hasVessel(board) && asked && !holdsCue(board, 'question');
 }
 
 /** `eyes on T4 please`: a vessel and a please, with no other business. */
 const isBarePlea = (board: Board): boolean =>
   ['please', 'pls', 'plz', 'plse'].some((word) => board.terms.some(({ text }) => text === word)) &&
-  board.terms.length <= 6 && !holdsCue(board, 'vessel-statement') && !holdsCue(board, 'question') && !holdsCue(board, 'cleaning');
+  board.terms.length <= 6 &&
+  !holdsCue(board, 'vessel-statement') &&
+  !holdsCue(board, 'question') &&
+  !holdsCue(board, 'cleaning');
 
 function isDose(board: Board): boolean {
   if (any(board, 'target', 'ph', 'free_mg_L', 'total_mg_L')) return true;
-  const moves = holdsCue(board, 'vessel-statement') && !holdsCue(board, 'how-much') && !hasAdditive(board) && !board.marks.fruitByWeight;
-  if (any(board, 'volume_L') || board.marks.barrelsCounted === true || board.marks.fruitByWeight === true || (board.marks.castsWithoutSize === true && any(board, 'stage', 'style'))) return !moves;
+  const moves =
+    holdsCue(board, 'vessel-statement') &&
+    !holdsCue(board, 'how-much') &&
+    !hasAdditive(board) &&
+    !board.marks.fruitByWeight;
+  if (
+    any(board, 'volume_L') ||
+    board.marks.barrelsCounted === true ||
+    board.marks.fruitByWeight === true ||
+    (board.marks.castsWithoutSize === true && any(board, 'stage', 'style'))
+  )
+    return !moves;
   if (asksForDose(board)) return true;
   if (hasVessel(board) && isBarePlea(board)) return true;
-  return any(board, 'temperature_C', 'alcohol_percent', 'sugar_g_L', 'binding_share', 'binding_allowance_percent') && hasVessel(board) && !moves;
+  return (
+    any(
+      board,
+      'temperature_C',
+      'alcohol_percent',
+      'sugar_g_L',
+      'binding_share',
+      'binding_allowance_percent',
+    ) &&
+    hasVessel(board) &&
+    !moves
+  );
 }
 
 /** What a message wants. With nothing that is ours it is chat. */

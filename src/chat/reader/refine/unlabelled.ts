@@ -1,5 +1,16 @@
 import type { Board } from '../board.ts';
-import { decimalAt, figureAt, find, isCue, isFound, isFree, isMark, placeOf, refuse } from '../board.ts';
+import {
+  decimalAt,
+  figureAt,
+  find,
+  isCue,
+  isFound,
+  isFree,
+  isMark,
+  placeOf,
+  refuse,
+  setAside,
+} from '../board.ts';
 import { concentrationAt, mg_L_IN } from '../units.ts';
 
 /** A figure without the word free is free SO2 up to this; above it may be total (mg/L). */
@@ -10,12 +21,20 @@ const isPhLike = (board: Board, i: number): boolean => {
   return /^\d[.,']\d+$/.test(board.terms[i]!.text) && value >= 2.7 && value <= 4.5;
 };
 
-const isWhole = (board: Board, i: number): boolean => board.terms[i]!.value === undefined && /^\d+$/.test(board.terms[i]!.text);
+const isWhole = (board: Board, i: number): boolean =>
+  board.terms[i]!.value === undefined && /^\d+$/.test(board.terms[i]!.text);
 
 /** Whether the figure ends or begins a range with a figure beside it: `18-20`. */
 function rangeEnd(board: Board, i: number): number | undefined {
-  const joins = (isMark(board, i + 1, '-') && board.terms[i + 1]!.gap === (board.terms[i + 2]?.gap ?? false)) || isCue(board, i + 1, 'to');
-  return joins && isFree(board, i + 2) && isPhLike(board, i) === isPhLike(board, i + 2) && !(isMark(board, i + 1, '-') && board.terms[i + 1]!.gap) ? i + 2 : undefined;
+  const joins =
+    (isMark(board, i + 1, '-') && board.terms[i + 1]!.gap === (board.terms[i + 2]?.gap ?? false)) ||
+    isCue(board, i + 1, 'to');
+  return joins &&
+    isFree(board, i + 2) &&
+    isPhLike(board, i) === isPhLike(board, i + 2) &&
+    !(isMark(board, i + 1, '-') && board.terms[i + 1]!.gap)
+    ? i + 2
+    : undefined;
 }
 
 /** `23 Chard`: the vintage, or free SO2? */
@@ -25,20 +44,33 @@ function mayBeVintage(board: Board, i: number): boolean {
   return beside && value >= 10 && value <= 30 && concentrationAt(board, i + 1) === undefined;
 }
 
-const isAfterInto = (board: Board, i: number): boolean => isCue(board, i - 1, 'in') && !isCue(board, i - 1, 'is');
+const isAfterInto = (board: Board, i: number): boolean =>
+  isCue(board, i - 1, 'in') && !isCue(board, i - 1, 'is');
 
 /** An article alone names no tank: `the 4`. */
-const isAfterArticle = (board: Board, i: number): boolean => isCue(board, i - 1, 'article') || isMark(board, i - 1, '#');
+const isAfterArticle = (board: Board, i: number): boolean =>
+  isCue(board, i - 1, 'article') || isMark(board, i - 1, '#');
+
+/** `at 3.30` may be the clock. */
+const isTimeLike = (board: Board, i: number): boolean =>
+  /^\d\.[0-5]\d$/.test(board.terms[i]!.text) &&
+  ['at', 'by', 'until', 'till', 'from', 'since', 'before', 'after'].includes(board.terms[i - 1]?.text ?? '');
 
 function findPh(board: Board, candidates: readonly number[]): void {
   const likely = candidates.filter((i) => isPhLike(board, i) && concentrationAt(board, i + 1) === undefined);
   if (isFound(board, 'ph') || likely.length === 0) return;
   if (likely.length > 1 && new Set(likely.map((i) => decimalAt(board, i).value)).size > 1) {
-    for (const i of likely) if (isFree(board, i)) refuse(board, 'ambiguous-number', i, rangeEnd(board, i) ?? i);
+    for (const i of likely)
+      if (isFree(board, i)) refuse(board, 'ambiguous-number', i, rangeEnd(board, i) ?? i);
     return;
   }
   const [i] = likely as [number];
-  if (isAfterInto(board, i) || /^\d\.[0-5]\d$/.test(board.terms[i]!.text) && ['at', 'by', 'until', 'till', 'from', 'since'].includes(board.terms[i - 1]?.text ?? '')) return refuse(board, 'ambiguous-number', i, i);
+  if (
+    isTimeLike(board, i) &&
+    board.findings.every(({ field }) => field === 'vessel' || field === 'stage' || field === 'style')
+  )
+    return setAside(board, i, i);
+  if (isAfterInto(board, i) || isTimeLike(board, i)) return refuse(board, 'ambiguous-number', i, i);
   board.notes.push({ id: 'ph-unlabelled', text: placeOf(board, i, i).text });
   find(board, 'ph', decimalAt(board, i).value, 'bare', i, i);
 }
@@ -46,13 +78,18 @@ function findPh(board: Board, candidates: readonly number[]): void {
 function findFree(board: Board, candidates: readonly number[]): void {
   const left = candidates.filter((i) => isFree(board, i));
   const vintage = left.find((i) => mayBeVintage(board, i));
-  if (vintage !== undefined && (isFound(board, 'free_mg_L') || left.some((i) => i !== vintage && concentrationAt(board, i + 1) !== undefined))) {
+  if (
+    vintage !== undefined &&
+    (isFound(board, 'free_mg_L') ||
+      left.some((i) => i !== vintage && concentrationAt(board, i + 1) !== undefined))
+  ) {
     board.setAside.push(placeOf(board, vintage, vintage).text);
     board.taken[vintage] = true;
     return findFree(board, candidates);
   }
   if (left.length === 0) return;
-  const only = left.length === 1 || new Set(left.map((i) => figureAt(board, i).value)).size === 1 ? left[0]! : undefined;
+  const only =
+    left.length === 1 || new Set(left.map((i) => figureAt(board, i).value)).size === 1 ? left[0]! : undefined;
   const isTaken = isFound(board, 'free_mg_L') || isFound(board, 'added_mg_L');
   const figure = only === undefined ? undefined : figureAt(board, only);
   const unit = only === undefined ? undefined : concentrationAt(board, only + 1);
@@ -66,29 +103,56 @@ function findFree(board: Board, candidates: readonly number[]): void {
     board.notes.push({ id: 'free-unlabelled', text: placeOf(board, only, to).text });
     return find(board, 'free_mg_L', figure.value * (unit ? mg_L_IN[unit.id]! : 1), 'bare', figure.from, to);
   }
-  for (const i of left) if (isFree(board, i)) refuse(board, 'ambiguous-number', figureAt(board, i).from, rangeEnd(board, i) ?? concentrationAt(board, i + 1)?.to ?? i);
+  for (const i of left)
+    if (isFree(board, i))
+      refuse(
+        board,
+        'ambiguous-number',
+        figureAt(board, i).from,
+        rangeEnd(board, i) ?? concentrationAt(board, i + 1)?.to ?? i,
+      );
 }
 
-const CELLAR = /^(label|unit:(?!none|C|F|degree)|additive|style|category|product|stage|vessel|organic|cue:(cellar|variety|molecular|target|wine|ml)$)/;
+const CELLAR =
+  /^(label|unit:(?!none|C|F|degree)|additive|style|category|product|stage|vessel|organic|cue:(cellar|variety|molecular|target|wine|ml)$)/;
 
 /** Whether the message speaks of wine at all: a cellar word, a unit, or nothing but numbers. */
 export function isCellarTalk(board: Board): boolean {
   const words = board.terms.filter((term) => term.kind === 'word');
   if (words.length === 0) return board.terms.some((term) => term.kind === 'number');
-  return board.findings.length > 0 || board.terms.some((term) => term.kind === 'word' && term.tags.some((tag) => CELLAR.test(tag)));
+  return (
+    board.findings.length > 0 ||
+    board.terms.some((term) => term.kind === 'word' && term.tags.some((tag) => CELLAR.test(tag)))
+  );
 }
 
 /** How many ordinary words a message may hold beside bare figures and still be a reading. */
 const MOST_CHATTER = 5;
 
 function isChatter(board: Board): boolean {
-  const firm = board.findings.some(({ field, said }) => said !== 'bare' && field !== 'vessel' && field !== 'style' && field !== 'stage' && field !== 'category' && field !== 'product' && field !== 'organic');
+  const firm = board.findings.some(
+    ({ field, said }) =>
+      said !== 'bare' &&
+      field !== 'vessel' &&
+      field !== 'style' &&
+      field !== 'stage' &&
+      field !== 'category' &&
+      field !== 'product' &&
+      field !== 'organic',
+  );
   if (firm || holdsAim(board)) return false;
-  const strange = board.terms.filter((term, i) => term.kind === 'word' && board.taken[i] !== true && (term.tags.length === 0 || term.tags.every((tag) => tag === 'cue:plain' || tag === 'cue:verb' || tag === 'cue:pronoun'))).length;
+  const strange = board.terms.filter(
+    (term, i) =>
+      term.kind === 'word' &&
+      board.taken[i] !== true &&
+      (term.tags.length === 0 ||
+        term.tags.every((tag) => tag === 'cue:plain' || tag === 'cue:verb' || tag === 'cue:pronoun')),
+  ).length;
   return strange >= MOST_CHATTER;
 }
 
-const holdsAim = (board: Board): boolean => board.findings.some(({ field }) => field === 'target' || field === 'volume_L');
+const holdsAim = (board: Board): boolean =>
+  board.findings.some(({ field }) => field === 'target' || field === 'volume_L');
 
 /** Reads the figures that nothing names: one as the pH, one as the free SO2; else it asks. */
 export function readUnlabelled(board: Board): void {
@@ -97,4 +161,3 @@ export function readUnlabelled(board: Board): void {
   findPh(board, candidates);
   findFree(board, candidates);
 }
-

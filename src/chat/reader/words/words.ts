@@ -13,7 +13,8 @@ export type LabelId =
   'ph' | 'free' | 'total' | 'so2' | 'temperature' | 'alcohol' | 'sugar' | 'volume' | 'aside';
 
 /** Ways of naming an additive: `unnamed` lacks its cation, `none` is an additive that is none of ours. */
-export type AdditiveWord = AdditiveId | 'campden' | 'campden-potassium' | 'campden-sodium' | 'unnamed' | 'none';
+export type AdditiveWord =
+  AdditiveId | 'campden' | 'campden-potassium' | 'campden-sodium' | 'unnamed' | 'none';
 
 /** Small words that steer the reading. */
 export type CueId =

@@ -1,0 +1,51 @@
+import { expect, test } from 'vitest';
+import { readMessage } from '../../../src/chat/reader/read-message.ts';
+import { READER_DEFAULTS } from '../../../src/chat/reader/reader-defaults.ts';
+
+/** Figures that look like one field and are another's, or nobody's: `[text, field, never this value]`. */
+const NEVER: readonly (readonly [string, string, unknown])[] = [
+  ['barrel 17 225 L', 'volume_L', 17225],
+  ['free 20 800 gal', 'volume_L', 20800 * 3.785411784],
+  ['T8 900 gal pH 3.5 free 18', 'volume_L', 8900 * 3.785411784],
+  ['TA 3.8 free 20 25 hl', 'ph', 3.8],
+  ['VA 0.45 T4 20 hl pH 3.5', 'free_mg_L', 0.45],
+  ['2023 Chard T4 20 hl pH 3.4', 'free_mg_L', 2023],
+  ['back at 3.30', 'ph', 3.3],
+  ['10/12 T4 20 hl pH 3.5', 'free_mg_L', 10],
+  ['100 g kmbs in 20', 'free_mg_L', 20],
+  ['T4 60 hl/h pump', 'volume_L', 6000],
+  ['lot 44 kmbs T4 20 hl pH 3.5', 'free_mg_L', 44],
+  ['1,250 kg kmbs in 200 hl', 'mass_g', 1250],
+  ['50 ppm kmbs T4 20 hl', 'target', { add_mg_L: 50 }],
+  ['added 50 ppm kmbs T4', 'added_mg_L', 50],
+  ['5 G of must, pH 3.4', 'mass_g', 5],
+  ['sulphate 80 g in 20 hl', 'additive', 'potassium-metabisulfite'],
+  ['kmbs 13% 20 hl pH 3.5 free 12', 'strength_percent', 13],
+  ['4 puncheons 3.66 22 free', 'volume_L', 900],
+  ['molecular is 0.4 T4 20 hl', 'target', { molecular_mg_L: 0.4 }],
+  ['pH 3.5 to 3.6 T4 20 hl free 12', 'target', { free_mg_L: 3.6 }],
+  ['tank 4 in 20 minutes', 'free_mg_L', 20],
+  ['12° T4 20 hl pH 3.5 free 12', 'temperature_C', 12],
+];
+
+test.each(NEVER)('%j never gives %s %j', (text, field, value) => {
+  for (const { fields } of readMessage(text, READER_DEFAULTS).readings) {
+    expect(fields[field as 'ph']).not.toEqual(value);
+  }
+});
+
+const NO_ENTRY = [
+  "haven't added the 80 g to T4",
+  'no kmbs added to T4 today',
+  'if I added 80 g kmbs to T4 what then',
+  'did anyone add 80 g to T4?',
+  '80 g has to be added to T4 tomorrow',
+  'T4 needs 80 g kmbs added',
+  'ML done in T4, 20 hl',
+  'who added 80 g to T4',
+  'forgot to add 80 g kmbs T4',
+] as const;
+
+test.each(NO_ENTRY)('%j is no entry for the log', (text) => {
+  expect(readMessage(text, READER_DEFAULTS).readings.map(({ intent }) => intent)).not.toContain('added');
+});
