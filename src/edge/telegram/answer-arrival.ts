@@ -38,16 +38,15 @@ export async function answerArrival(arrival: Arrival, options: AnswerOptions): P
   const told = tapId === undefined ? undefined : tellTapSeen(tapId, options);
   try {
     const { writes, replies } = handle(message, await state.load(message));
+    const said = replies.map(say);
     await state.commit(writes);
     // Before the answer, but an acknowledgement that is slow to come holds nothing up.
     if (told !== undefined) await Promise.race([told, clock.wait(LONGEST_TAP_WAIT_MS)]);
-    const sent = await sendReplies(chatId, replies.map(say), { api: platform.patient, log, signal });
+    const sent = await sendReplies(chatId, said, { api: platform.patient, log, signal });
     return sent === 'ended';
   } catch (error) {
     log.error({ err: error, update: updateId }, 'a message could not be answered');
     return true;
-  } finally {
-    await told;
   }
 }
 

@@ -3,6 +3,7 @@ import { afterEach, beforeEach, expect, test } from 'vitest';
 
 import { faultsOfCall } from './bot-api-schema.ts';
 import { TOKEN } from './fake-bot-api.ts';
+import { realConversation } from './real-conversation.ts';
 import { serveBot } from './served-bot.ts';
 
 interface Sent {
@@ -84,11 +85,23 @@ afterEach(() => {
 });
 
 test('a private chat goes its way through the real address', async () => {
-  const { sent, faults, ended } = play([says('/start'), says('first'), taps('again')]);
-  const bot = serveBot(ROOT);
+  const { sent, faults, ended } = play([
+    says('/start'),
+    says('T4 pH 3.58 free 21'),
+    says('1450 gal'),
+    taps('Working'),
+    says('thanks'),
+  ]);
+  const bot = serveBot(ROOT, realConversation);
   await ended;
   nock.abortPendingRequests();
   await bot.stop();
-  expect(sent.map(({ text }) => text)).toEqual(['1: help', '2: first', '3: pressed again:2']);
+  expect(sent.map(({ text }) => text)).toEqual([
+    expect.stringContaining('T4 1450 gal pH 3.58 free 21'),
+    expect.stringContaining('what volume?'),
+    expect.stringContaining('T4: weigh 256 g potassium metabisulfite'),
+    expect.stringContaining('147.7 g ÷ 0.57629 = 256.3 g'),
+    expect.not.stringMatching(/\d/),
+  ]);
   expect(faults).toEqual([]);
 });
