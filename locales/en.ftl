@@ -100,6 +100,13 @@ condition-red =
         [over] If it is red (0.6 molecular): no amount, it would pass the limit.
        *[other] If it is red (0.6 molecular): { $amount }{ red-unit }.
     }
+condition-red-choice = If it is red, the full target is 0.6 molecular: button More.
+round-red =
+    { $amount ->
+        [none] { at }if red (0.6 molecular), nothing to add.
+        [over] { at }if red (0.6 molecular), no amount: it would pass the limit.
+       *[other] { at }if red (0.6 molecular), { $amount }{ red-unit }.
+    }
 red-unit =
     { $unit ->
         [tablets] {" "}tablets{ for-each-red }
@@ -263,7 +270,7 @@ target-of =
 
 ## What cannot be answered as it stands
 
-problem-ph-out-of-range = { at }pH “{ $about }” cannot be: I take 2.5 to 4.8. A lost point? Send it like: pH 3.58
+problem-ph-out-of-range = { at }“{ $about }” cannot be the pH of a wine: I take 2.5 to 4.8. A lost point? Send it like: pH 3.58
 problem-negative-value = { at }“{ $about }” is below zero, that cannot be. Send the figure again without the minus.
 problem-total-below-free = { at }the total is below the free (“{ $about }”). Free goes first: 18/60, or free 18 total 60
 problem-volume-not-positive = { at }a volume of “{ $about }” cannot be. Send it like: 1450 gal

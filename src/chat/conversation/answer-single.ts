@@ -2,16 +2,15 @@ import type { Reading, Understood } from '../reader/understood.ts';
 import type { DecimalMark } from '../replies/number-text.ts';
 import type { Reply } from '../replies/reply.ts';
 import { answerReading } from './answer-reading.ts';
-import { letterButtons } from './buttons.ts';
-import { completes } from './complete.ts';
-import { questionLine } from './lines/question.ts';
+import { belongs } from './complete.ts';
+import { questionFor } from './intents/asking.ts';
 import { mannerOf } from './manner.ts';
 import type { Memory, Waiting } from './memory.ts';
 import { cautionedToday, keeping, nextMemory, waitFor } from './next-memory.ts';
 import type { Outcome } from './outcome.ts';
 import type { Handled, IncomingMessage } from './ports.ts';
 import type { Settings } from './settings.ts';
-import { choicesFor, stillWaiting } from './waiting.ts';
+import { stillWaiting } from './waiting.ts';
 import { withShared } from './with-shared.ts';
 
 /** One reading: its answer, the reply, and what is kept for the next message. */
@@ -48,15 +47,15 @@ export function answerSingle(
 /** Talk in between leaves a question waiting, and so does a slip in the answer to it. */
 function keepsWaiting(reading: Reading, waiting: Waiting | undefined): Waiting | undefined {
   if (!waiting || reading.intent === 'chat') return waiting;
-  return reading.problems.length > 0 && completes(waiting.reading, reading) ? waiting : undefined;
+  return reading.problems.length > 0 && belongs(waiting.reading, reading) ? waiting : undefined;
 }
 
 function askAgain(
-  { field, reading, number }: Waiting,
+  waiting: Waiting,
   outcome: Outcome,
   mark: DecimalMark,
   settings: Settings,
 ): Pick<Outcome, 'lines' | 'buttons'> {
-  const buttons = letterButtons(number, field, choicesFor(field, reading, settings), mark);
-  return { lines: [...outcome.lines, questionLine(field, reading, settings)], buttons };
+  const { question, buttons } = questionFor(waiting.field, waiting, 'question', mark, settings);
+  return { lines: [...outcome.lines, ...question], buttons };
 }

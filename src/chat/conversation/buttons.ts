@@ -11,7 +11,8 @@ export type Does = 'w' | 's' | 't' | 'm' | 'nf' | 'red' | 'c' | 'l';
 /** At most so many buttons stand under a dose. */
 export const MOST_BUTTONS = 4;
 
-const LABELS = {
+/** What stands on a button, by what it does. */
+export const LABELS = {
   nf: 'button-not-finished',
   red: 'button-red',
   w: 'button-working',

@@ -25,17 +25,21 @@ function fits(waiting: Intent, next: Intent): boolean {
   return next === waiting || next === 'dose' || (next === 'effect' && waiting !== 'dose');
 }
 
+/** Whether a message can belong to the reading that waits: it contradicts nothing in it and names no other vessel. */
+export function belongs(waiting: Reading, next: Reading): boolean {
+  return (
+    fits(waiting.intent, next.intent) &&
+    !namesAnotherVessel(waiting.fields, next.fields) &&
+    !contradicts(waiting.fields, next.fields)
+  );
+}
+
 /**
  * Whether a message completes the reading that waits: it has fields of its own, contradicts nothing in it and names
  * no other vessel. Otherwise it starts a new one.
  */
 export function completes(waiting: Reading, next: Reading): boolean {
-  return (
-    fits(waiting.intent, next.intent) &&
-    Object.keys(next.fields).length > 0 &&
-    !namesAnotherVessel(waiting.fields, next.fields) &&
-    !contradicts(waiting.fields, next.fields)
-  );
+  return Object.keys(next.fields).length > 0 && belongs(waiting, next);
 }
 
 /** The waiting reading with the fields of its answer; what is assumed and what is still missing is worked out anew. */

@@ -2,7 +2,7 @@ import { readMessage } from '../reader/read-message.ts';
 import type { Understood } from '../reader/understood.ts';
 import { answerRound } from './answer-round.ts';
 import { answerSingle } from './answer-single.ts';
-import { bareNumberAfterTarget } from './bare-number.ts';
+import { bareNumberAfterTarget, isBareNumber, numberAskedAbout } from './bare-number.ts';
 import { complete, completes } from './complete.ts';
 import type { Memory, Waiting } from './memory.ts';
 import type { Handled, IncomingMessage } from './ports.ts';
@@ -35,7 +35,11 @@ export function handleText(
   if (asked) return asked;
   const button = /^\d{1,2}$/.test(mark) ? memory.lastButtons[Number(mark) - 1] : undefined;
   if (!waiting && button !== undefined) return handlePress(message, button, memory, settings);
-  const understood = readMessage(text, settings, waiting);
+  // A number can be no answer to a question for a name: it is neither a choice nor a reading of its own.
+  const understood =
+    waiting?.field === 'additive' && isBareNumber(mark)
+      ? numberAskedAbout(mark, settings, memory.decimalMark)
+      : readMessage(text, settings, waiting);
   return understood.readings.length === 1
     ? answerSingle(message, completed(understood, waiting, settings), memory, settings)
     : answerRound(message, understood, memory, settings);

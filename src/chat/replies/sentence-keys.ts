@@ -81,6 +81,7 @@ export interface SentenceValues {
   'choice-tablet_salt_g': 'value';
   'choice-to': 'additive' | 'amount' | 'free' | 'mark' | 'molecular';
   'condition-red': 'amount' | 'each' | 'unit';
+  'condition-red-choice': never;
   'condition-stage': never;
   'dose-gas': 'amount' | 'count' | 'vessel';
   'dose-in-all': 'amount' | 'count' | 'unit';
@@ -178,6 +179,7 @@ export interface SentenceValues {
   'round-effect': never;
   'round-missing': 'field' | 'vessel';
   'round-not-understood': 'about';
+  'round-red': 'amount' | 'each' | 'unit' | 'vessel';
   'round-target-stage': 'vessel';
   'safety-head': 'additive';
   'set-aside': 'list';

@@ -1,30 +1,42 @@
 import type { AskedField, Reading } from '../../reader/understood.ts';
+import type { DecimalMark } from '../../replies/number-text.ts';
 import type { Button, Line } from '../../replies/reply.ts';
 import { letterButtons } from '../buttons.ts';
 import { line, part } from '../lines/line.ts';
 import { questionLine } from '../lines/question.ts';
 import type { Turn } from '../outcome.ts';
+import type { Settings } from '../settings.ts';
 import { choicesFor, waitsFor } from '../waiting.ts';
 
-/** The one question of a reply, the letters of its choices, and the field that waits. */
+/** A question as it stands in a reply: its line, the lines of its choices, and their buttons. */
+export interface Question {
+  readonly question: readonly Line[];
+  readonly buttons: readonly Button[];
+}
+
+/** The question for a field of a remembered reading, with the letters of its choices. */
+export function questionFor(
+  field: AskedField,
+  { number, reading }: { readonly number: number; readonly reading: Reading },
+  room: Line['room'],
+  mark: DecimalMark,
+  settings: Settings,
+): Question {
+  const buttons = letterButtons(number, field, choicesFor(field, reading, settings), mark);
+  const options = buttons.map(({ mark: letter, label, values }) => ({
+    ...line(room, 'option', { mark: letter }),
+    list: [part(label, values)],
+  }));
+  return { question: [questionLine(field, reading, settings, room), ...options], buttons };
+}
+
+/** The one question that a reply to this reading asks, and the field that waits for its answer. */
 export function asking(
   reading: Reading,
-  turn: Turn,
+  { number, settings, manner }: Turn,
   room: Line['room'],
-): { question: Line[]; buttons: Button[]; waits?: AskedField } {
+): Question & { readonly waits?: AskedField } {
   const field = waitsFor(reading);
   if (field === undefined) return { question: [], buttons: [] };
-  const choices = choicesFor(field, reading, turn.settings);
-  const buttons = letterButtons(turn.number, field, choices, turn.manner.mark);
-  return {
-    question: [
-      questionLine(field, reading, turn.settings, room),
-      ...buttons.map(({ mark, label, values }) => ({
-        ...line(room, 'option', { mark }),
-        list: [part(label, values)],
-      })),
-    ],
-    buttons,
-    waits: field,
-  };
+  return { ...questionFor(field, { number, reading }, room, manner.mark, settings), waits: field };
 }

@@ -2,6 +2,7 @@ import { dose } from '../../../core/dose/dose.ts';
 import type { DoseAnswer, WarningCode } from '../../../core/dose/answer.ts';
 import type { DoseRequest } from '../../../core/dose/request.ts';
 import type { Reading } from '../../reader/understood.ts';
+import type { Line } from '../../replies/reply.ts';
 import { choiceButtons, doseButtons } from '../buttons.ts';
 import { assumedLines } from '../lines/assumed.ts';
 import { cautionLines } from '../lines/cautions.ts';
@@ -56,7 +57,9 @@ function wholeDose(reading: Reading, request: DoseRequest, answer: DoseAnswer, t
     answer,
     inRound: [
       ...first,
-      ...(red ? [line('first', 'condition-red', redValues(red, manner))] : []),
+      ...(red
+        ? [line('first', 'round-red', { vessel: vesselText(reading), ...redValues(red, manner) })]
+        : []),
       ...warningLines(answer.warnings, manner, 'first'),
     ],
     lines: [
@@ -103,7 +106,7 @@ function choice(reading: Reading, answer: DoseAnswer, turn: Turn): Outcome {
     inRound: [line('first', 'round-choice', { vessel, ph })],
     lines: [
       ...choiceLines(reading, vessel, answer, additive, manner),
-      ...conditionLines(reading, answer, manner),
+      ...choiceConditions(reading, answer),
       ...factLines(reading, manner),
       ...assumedLines(reading, manner),
       ...warningLines(answer.warnings, manner, 'warning', SAID_BY_THE_CHOICE),
@@ -112,6 +115,14 @@ function choice(reading: Reading, answer: DoseAnswer, turn: Turn): Outcome {
     buttons: choiceButtons(number, answer.choices ?? [], manner),
     ...(inFull && { cautioned: additive }),
   };
+}
+
+/** For a red the full target is another one; that too would be a choice, so no amount is told for it here. */
+function choiceConditions(reading: Reading, answer: DoseAnswer): Line[] {
+  return [
+    ...(reading.assumed.stage === undefined ? [] : [line('condition', 'condition-stage')]),
+    ...(redFigures(answer) === undefined ? [] : [line('condition', 'condition-red-choice')]),
+  ];
 }
 
 function nothing(reading: Reading, answer: DoseAnswer, turn: Turn): Outcome {

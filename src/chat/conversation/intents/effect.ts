@@ -41,7 +41,7 @@ export function answerEffect(reading: Reading, turn: Turn): Outcome {
       ...factLines(reading, manner),
       ...assumedLines(reading, manner),
       ...workingLines(answer.steps, manner.mark),
-      ...warningLines(answer.warnings, manner),
+      ...warningLines(answer.warnings, manner, 'warning', landing ? ['free-low-may-bind-all'] : []),
       ...cautionLines(additive.id, inFull),
     ],
     buttons: buttonsFor(turn.number, [...(inFull ? [] : (['s'] as const)), 'w', 'm']),

@@ -13,9 +13,16 @@ export function redFigures(answer: Pick<DoseAnswer, 'warnings'>): Warning['value
 
 /** What the first line depends on: that the fermentations are over, and the amount for a red. */
 export function conditionLines(reading: Reading, answer: DoseAnswer, manner: Manner): Line[] {
-  const stage = reading.assumed.stage === undefined ? [] : [line('condition', 'condition-stage')];
+  const stage = stageLines(reading);
   const red = redFigures(answer);
   return red === undefined ? stage : [...stage, line('condition', 'condition-red', redValues(red, manner))];
+}
+
+/** A stated aim is reckoned at every stage; where sulfite does harm, it is said beside it. */
+function stageLines({ assumed, fields }: Reading): Line[] {
+  if (assumed.stage !== undefined) return [line('condition', 'condition-stage')];
+  if (fields.stage === 'malolactic') return [line('condition', 'no-dose-why')];
+  return fields.stage === 'fermenting' ? [line('condition', 'no-dose-why-fermenting')] : [];
 }
 
 /** The amount for a red as the sentences take it: `none` where nothing is needed, `over` where the limit forbids it. */

@@ -7,7 +7,8 @@ import type { Step } from '../../../core/working.ts';
 import type { Reading } from '../../reader/understood.ts';
 import type { DecimalMark } from '../../replies/number-text.ts';
 import type { Button, Line } from '../../replies/reply.ts';
-import { buttonsFor } from '../buttons.ts';
+import { buttonsFor, type LABELS } from '../buttons.ts';
+import { redFigures } from '../lines/condition.ts';
 import { cautionLines } from '../lines/cautions.ts';
 import { line } from '../lines/line.ts';
 import { vesselText } from '../lines/vessel.ts';
@@ -64,6 +65,17 @@ export function safetyLines(reading: Reading): Line[] {
   return [line('first', 'safety-head', { additive: additive.id }), ...cautionLines(additive.id, true)];
 }
 
+function buttonsBehind(reading: Reading, warned: readonly Warning[]): (keyof typeof LABELS)[] {
+  if (reading.intent !== 'dose') return ['w', 's'];
+  return [
+    ...(reading.assumed.stage === undefined ? [] : (['nf'] as const)),
+    ...(redFigures({ warnings: warned }) === undefined ? [] : (['red'] as const)),
+    'w',
+    's',
+    't',
+  ];
+}
+
 /** All that stands behind `More`: every warning, and the buttons that had no room. */
 export function moreLines(
   found: Remembered,
@@ -72,10 +84,11 @@ export function moreLines(
 ): { lines: Line[]; buttons: Button[] } {
   const { reading, number } = found;
   const manner = mannerOf(reading, mark, settings);
-  const warnings = allWarningLines(reckonAgain(reading, settings).warnings, manner);
+  const warned = reckonAgain(reading, settings).warnings;
+  const warnings = allWarningLines(warned, manner);
   const head = line('first', 'more-head', { vessel: vesselText(reading) });
   return {
     lines: [head, ...(warnings.length > 0 ? warnings : [line('first', 'more-no-warnings')])],
-    buttons: buttonsFor(number, reading.intent === 'dose' ? ['w', 's', 't'] : ['w', 's']),
+    buttons: buttonsFor(number, buttonsBehind(reading, warned)),
   };
 }
