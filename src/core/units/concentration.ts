@@ -1,5 +1,6 @@
 import { assertBetween } from '../bounds.ts';
-import { factorOf } from './define.ts';
+import { GRAMS_IN } from './mass.ts';
+import { LITRES_IN } from './volume.ts';
 
 /** Concentration units by their canonical ids; `ppm` is mg/L, as the trade uses it in wine. */
 export const CONCENTRATION_UNITS = [
@@ -14,7 +15,8 @@ export const CONCENTRATION_UNITS = [
 export type ConcentrationUnitId = (typeof CONCENTRATION_UNITS)[number];
 
 /**
- * mg/L in one of each concentration unit. Source: mathjs's own definitions; the gallons by law (`define`).
+ * mg/L in one of each concentration unit, from masses and volumes. A test holds them against mathjs and js-quantities.
+ * Source: `GRAMS_IN`, `LITRES_IN`.
  *
  * @example
  * ```ts
@@ -22,9 +24,15 @@ export type ConcentrationUnitId = (typeof CONCENTRATION_UNITS)[number];
  * MG_L_IN.ppm // => 1
  * ```
  */
-export const MG_L_IN = Object.fromEntries(
-  CONCENTRATION_UNITS.map((unit) => [unit, Number(factorOf(unit, 'mg/L').toPrecision(14))]),
-) as Readonly<Record<ConcentrationUnitId, number>>;
+export const MG_L_IN: Readonly<Record<ConcentrationUnitId, number>> = {
+  'mg/L': 1,
+  ppm: 1,
+  'g/L': 1000,
+  'g/hL': 1000 / LITRES_IN.hL,
+  'lb/galUS': (GRAMS_IN.lb * 1000) / LITRES_IN.galUS,
+  'lb/galUK': (GRAMS_IN.lb * 1000) / LITRES_IN.galUK,
+  'oz/galUS': (GRAMS_IN.oz * 1000) / LITRES_IN.galUS,
+};
 
 /**
  * A concentration in mg/L.

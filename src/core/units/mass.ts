@@ -1,12 +1,12 @@
 import { assertBetween } from '../bounds.ts';
-import { factorOf } from './define.ts';
 
 /** Mass units by their canonical ids, those of mathjs; `tonne` is 1000 kg (mathjs's `ton` is the short ton). */
 export const MASS_UNITS = ['g', 'kg', 'mg', 'lb', 'oz', 'tonne'] as const;
 export type MassUnitId = (typeof MASS_UNITS)[number];
 
 /**
- * Grams in one of each mass unit (g). Source: mathjs's own definitions (pound and ounce by law: 453.59237 g).
+ * Grams in one of each mass unit (g), exact by definition. A test holds them against mathjs and js-quantities.
+ * Source: the decimal prefixes; the international pound of 453.59237 g and its sixteenth.
  *
  * @example
  * ```ts
@@ -14,9 +14,14 @@ export type MassUnitId = (typeof MASS_UNITS)[number];
  * GRAMS_IN.oz // => 28.349523125
  * ```
  */
-export const GRAMS_IN = Object.fromEntries(
-  MASS_UNITS.map((unit) => [unit, Number(factorOf(unit, 'g').toPrecision(14))]),
-) as Readonly<Record<MassUnitId, number>>;
+export const GRAMS_IN: Readonly<Record<MassUnitId, number>> = {
+  g: 1,
+  kg: 1000,
+  mg: 0.001,
+  lb: 453.59237,
+  oz: 453.59237 / 16,
+  tonne: 1_000_000,
+};
 
 /**
  * A mass in grams.

@@ -1,12 +1,12 @@
 import { assertBetween } from '../bounds.ts';
-import { factorOf } from './define.ts';
 
 /** Volume units by their canonical ids: those of mathjs, and the two gallons. */
 export const VOLUME_UNITS = ['L', 'hL', 'mL', 'cL', 'dL', 'm3', 'galUS', 'galUK'] as const;
 export type VolumeUnitId = (typeof VOLUME_UNITS)[number];
 
 /**
- * Litres in one of each volume unit (L). Source: mathjs's own definitions; the gallons by law (`define`).
+ * Litres in one of each volume unit (L), exact by definition. A test holds them against mathjs and js-quantities.
+ * Source: the decimal prefixes; the US gallon NIST Handbook 44, the imperial gallon UK Weights and Measures Act.
  *
  * @example
  * ```ts
@@ -14,9 +14,16 @@ export type VolumeUnitId = (typeof VOLUME_UNITS)[number];
  * LITRES_IN.hL // => 100
  * ```
  */
-export const LITRES_IN = Object.fromEntries(
-  VOLUME_UNITS.map((unit) => [unit, Number(factorOf(unit, 'L').toPrecision(14))]),
-) as Readonly<Record<VolumeUnitId, number>>;
+export const LITRES_IN: Readonly<Record<VolumeUnitId, number>> = {
+  L: 1,
+  hL: 100,
+  mL: 0.001,
+  cL: 0.01,
+  dL: 0.1,
+  m3: 1000,
+  galUS: 3.785411784,
+  galUK: 4.54609,
+};
 
 /**
  * A volume in litres.

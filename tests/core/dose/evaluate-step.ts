@@ -1,5 +1,7 @@
-import { math } from '../../../src/core/units/define.ts';
+import { loadMathjs } from '../../../src/core/units/define.ts';
 import { plainText, type Step } from '../../../src/core/working.ts';
+
+const math = await loadMathjs();
 
 /** What mathjs makes of a step's `substituted`, in the unit of its result. */
 export function evaluated(step: Step): number {

@@ -1,11 +1,14 @@
 import Qty from 'js-quantities';
 import { describe, expect, test } from 'vitest';
-import { MG_L_IN, mg_LFrom, mg_LTo } from '../../../src/core/units/concentration.ts';
-import { math } from '../../../src/core/units/define.ts';
+import { CONCENTRATION_UNITS, MG_L_IN, mg_LFrom, mg_LTo } from '../../../src/core/units/concentration.ts';
+import { loadMathjs } from '../../../src/core/units/define.ts';
 import { GRAMS_IN, MASS_UNITS, gramsFrom, gramsTo } from '../../../src/core/units/mass.ts';
 import { celsiusFrom, celsiusTo } from '../../../src/core/units/temperature.ts';
 import { LITRES_IN, VOLUME_UNITS, litresFrom, litresTo } from '../../../src/core/units/volume.ts';
 import { PRINTED_CONVERSIONS, UNIT_DEFINITIONS } from '../../tables/units.ts';
+
+const math = await loadMathjs();
+const byMathjs = (from: string, to: string): number => math.unit(1, from).toNumber(to);
 
 const THEIRS: Readonly<Record<string, string>> = {
   galUS: 'gal',
@@ -36,6 +39,18 @@ describe('units as js-quantities has them (it rounds its gallon and ounce to eig
   });
   test.each([-5, 0, 32, 57, 98.6])('%d °F in °C', (fahrenheit) => {
     expect(celsiusFrom(fahrenheit, 'F')).toBeCloseTo(Qty(`${fahrenheit} tempF`).to('tempC').scalar, 9);
+  });
+});
+
+describe('units as mathjs has them', () => {
+  test.each(VOLUME_UNITS)('a %s in litres', (unit) => {
+    expect(LITRES_IN[unit]).toBeCloseTo(byMathjs(unit, 'L'), 12);
+  });
+  test.each(MASS_UNITS)('a %s in grams', (unit) => {
+    expect(Math.abs(GRAMS_IN[unit] / byMathjs(unit, 'g') - 1)).toBeLessThan(1e-14);
+  });
+  test.each(CONCENTRATION_UNITS)('a %s in mg/L', (unit) => {
+    expect(Math.abs(MG_L_IN[unit] / byMathjs(unit, 'mg/L') - 1)).toBeLessThan(1e-14);
   });
 });
 
