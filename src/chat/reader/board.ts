@@ -3,6 +3,7 @@ import type { FoldedText } from './fold-text.ts';
 import type { Grouping } from './numbers.ts';
 import { readDecimal, readNumeral } from './numbers.ts';
 import type { Term } from './split-terms.ts';
+import { termIn } from './split-terms.ts';
 import type { FieldName, Fields, Marks, Place, ReadNote, ReaderSettings } from './understood.ts';
 import type { CueId, Tag } from './words/words.ts';
 
@@ -39,6 +40,9 @@ export interface Board {
 
 /** A finder or refiner: looks at the board and writes what it found. */
 export type Finder = (board: Board) => void;
+
+/** Term `i` of a board; past either end an empty line end. */
+export const termAt = (board: Board, i: number): Term => termIn(board.terms, i);
 
 /** Whether term `i` carries a tag. */
 export const hasTag = (board: Board, i: number, tag: Tag): boolean =>
@@ -89,7 +93,7 @@ export function find<F extends FieldName>(
   from: number,
   to: number,
 ): void {
-  board.findings.push({ field, value, said, from, to } as Finding);
+  board.findings.push({ field, value, said, from, to });
   claim(board, from, to);
 }
 

@@ -29,9 +29,10 @@ function indexOf(lists: readonly Words[]): ReadonlyMap<string, readonly Phrase[]
     for (const [id, phrases] of Object.entries(danger) as [DangerId, readonly string[]][]) {
       for (const phrase of phrases) {
         const words = phrase.split(' ');
-        const same = index.get(words[0]!) ?? [];
+        const first = words[0] ?? '';
+        const same = index.get(first) ?? [];
         same.push({ language, words, id });
-        index.set(words[0]!, same);
+        index.set(first, same);
       }
     }
   }
@@ -57,7 +58,7 @@ const OPENERS: ReadonlySet<DangerId> = new Set<DangerId>([
 function hitsByLanguage(words: readonly string[]): Map<Language, Map<DangerId, Hit[]>> {
   const found = new Map<Language, Map<DangerId, Hit[]>>();
   for (let i = 0; i < words.length; i++) {
-    for (const { language, words: phrase, id } of INDEX.get(words[i]!) ?? []) {
+    for (const { language, words: phrase, id } of INDEX.get(words[i] ?? '') ?? []) {
       if (!phrase.every((word, k) => words[i + k] === word)) continue;
       const hits = found.get(language) ?? new Map<DangerId, Hit[]>();
       found.set(language, hits.set(id, [...(hits.get(id) ?? []), { from: i, to: i + phrase.length - 1 }]));

@@ -124,7 +124,9 @@ function work(
  * @param shared Facts of the round's first line, which count as said.
  * @example
  * ```ts
- * finishReading({ intent: 'dose', fields: { ph: 3.5, free_mg_L: 20 }, problems: [], setAside: [], notes: [], marks: {}, where: {} }, SETTINGS).asks // => ['volume_L']
+ * import { READER_DEFAULTS } from './reader-defaults.ts';
+ * const draft = { intent: 'dose', fields: { ph: 3.5, free_mg_L: 20 }, problems: [], setAside: [], notes: [], marks: {}, where: {} };
+ * finishReading(draft, READER_DEFAULTS).asks // => ['volume_L']
  * ```
  */
 export function finishReading(draft: Draft, settings: ReaderSettings, shared: Fields = {}): Reading {

@@ -83,25 +83,27 @@ export function foldText(message: string): FoldedText {
   const at: number[] = [];
   const capital: boolean[] = [];
   let text = '';
+  const keep = (plain: string, from: number, isCapital: boolean): void => {
+    text += plain;
+    for (let k = 0; k < plain.length; k++) {
+      at.push(from);
+      capital.push(isCapital);
+    }
+  };
   for (let i = 0; i < message.length;) {
     const code = message.codePointAt(i) ?? 0;
     const size = code > 0xffff ? 2 : 1;
     const isCapital = code >= 65 && code <= 90;
     if (code < 128) {
       if (code === 13) {
-        if (message.charCodeAt(i + 1) !== 10) ((text += '\n'), at.push(i), capital.push(false));
+        if (message.charCodeAt(i + 1) !== 10) keep('\n', i, false);
       } else {
         const plain =
           code === 9 ? ' ' : code === 96 ? "'" : String.fromCharCode(isCapital ? code + 32 : code);
-        text += plain;
-        at.push(i);
-        capital.push(isCapital);
+        keep(plain, i, isCapital);
       }
     } else {
-      for (const plain of plainOf(message.slice(i, i + size), code)) {
-        for (let k = 0; k < plain.length; k++) (at.push(i), capital.push(false));
-        text += plain;
-      }
+      keep(plainOf(message.slice(i, i + size), code), i, false);
     }
     i += size;
   }

@@ -1,4 +1,5 @@
 import type { Term } from './split-terms.ts';
+import { termIn } from './split-terms.ts';
 
 const DENOMINATORS = new Set([2, 3, 4, 8, 16]);
 const isWhole = (term: Term | undefined): boolean =>
@@ -25,15 +26,15 @@ function joined(first: Term, last: Term, value: number, text: string): Term {
 function joinFractions(terms: readonly Term[]): Term[] {
   const out: Term[] = [];
   for (let i = 0; i < terms.length; i++) {
-    const [a, slash, b] = [terms[i]!, terms[i + 1], terms[i + 2]];
+    const [a, slash, b] = [termIn(terms, i), termIn(terms, i + 1), termIn(terms, i + 2)];
     const vulgar = a.kind === 'number' && a.value !== undefined && a.value < 1;
-    const [n, d] = [Number(a.text), Number(b?.text)];
+    const [n, d] = [Number(a.text), Number(b.text)];
     const plain =
       isWhole(a) &&
-      slash?.text === '/' &&
+      slash.text === '/' &&
       !slash.gap &&
       isWhole(b) &&
-      b?.gap === false &&
+      b.gap === false &&
       DENOMINATORS.has(d) &&
       n > 0 &&
       n < d;
@@ -41,8 +42,8 @@ function joinFractions(terms: readonly Term[]): Term[] {
       out.push(a);
       continue;
     }
-    const last = plain ? b! : a;
-    const share = plain ? n / d : a.value!;
+    const last = plain ? b : a;
+    const share = plain ? n / d : (a.value ?? 0);
     const whole = out.at(-1);
     if (
       whole &&
@@ -66,9 +67,9 @@ function isClaimedBefore(terms: readonly Term[], i: number): boolean {
   let k = i;
   while (
     k >= 0 &&
-    (terms[k]!.text === ':' ||
-      terms[k]!.text === '=' ||
-      terms[k]!.text === '#' ||
+    (termIn(terms, k).text === ':' ||
+      termIn(terms, k).text === '=' ||
+      termIn(terms, k).text === '#' ||
       (has(terms[k], /^cue:is$/) && !has(terms[k], CLAIMS_NEXT)))
   )
     k--;
@@ -77,8 +78,8 @@ function isClaimedBefore(terms: readonly Term[], i: number): boolean {
 
 /** `T8 900 gal`: the 8 is the vessel's, or the label's that it is glued to. */
 const isGluedToWord = (terms: readonly Term[], i: number): boolean =>
-  (terms[i]!.gap === false &&
-    (terms[i - 1]?.kind === 'word' || (terms[i - 1]?.text === '-' && terms[i - 1]!.gap === false))) ||
+  (termIn(terms, i).gap === false &&
+    (terms[i - 1]?.kind === 'word' || (terms[i - 1]?.text === '-' && termIn(terms, i - 1).gap === false))) ||
   terms[i - 1]?.text === '/';
 
 const unitFollows = (terms: readonly Term[], i: number): boolean =>
@@ -104,13 +105,13 @@ function hasOtherFree(terms: readonly Term[], from: number, to: number): boolean
 function joinBlankGroups(terms: readonly Term[]): Term[] {
   const out: Term[] = [];
   for (let i = 0; i < terms.length; i++) {
-    const first = terms[i]!;
+    const first = termIn(terms, i);
     let last = i;
     if (isWhole(first) && first.text.length <= 3 && !first.text.startsWith('0')) {
       while (
         terms[last + 1]?.kind === 'number' &&
-        terms[last + 1]!.gap &&
-        /^\d{3}([.,]\d{1,2})?$/.test(terms[last + 1]!.text)
+        termIn(terms, last + 1).gap &&
+        /^\d{3}([.,]\d{1,2})?$/.test(termIn(terms, last + 1).text)
       )
         last++;
     }
@@ -129,7 +130,7 @@ function joinBlankGroups(terms: readonly Term[]): Term[] {
       .slice(i, last + 1)
       .map((term) => term.text)
       .join('');
-    const end = terms[last]!.end;
+    const end = termIn(terms, last).end;
     out.push(
       unsure
         ? { ...first, text: `${text}?`, end, value: Number.NaN }
@@ -147,6 +148,9 @@ function joinBlankGroups(terms: readonly Term[]): Term[] {
  * @returns The terms with such numbers as one; its `value` is NaN where the blank could also part two figures.
  * @example
  * ```ts
+ * import { foldText } from './fold-text.ts';
+ * import { LEXICON } from './lexicon.ts';
+ * import { splitTerms } from './split-terms.ts';
  * joinNumbers(splitTerms(foldText('1 1/2 oz'), LEXICON))[0].value // => 1.5
  * joinNumbers(splitTerms(foldText('free 20 800 gal'), LEXICON)).length // => 4
  * ```

@@ -2,10 +2,11 @@ import type { Term } from './split-terms.ts';
 
 /** The terms of each line that has any. */
 export function linesOf(terms: readonly Term[]): Term[][] {
-  const lines: Term[][] = [[]];
+  let line: Term[] = [];
+  const lines: Term[][] = [line];
   for (const term of terms) {
-    if (term.kind === 'break') lines.push([]);
-    else lines.at(-1)!.push(term);
+    if (term.kind === 'break') lines.push((line = []));
+    else line.push(term);
   }
-  return lines.filter((line) => line.length > 0);
+  return lines.filter(({ length }) => length > 0);
 }

@@ -30,7 +30,7 @@ function isOneSlip(a: string, b: string): boolean {
 const isSwapped = (a: string, b: string): boolean =>
   a.length === b.length &&
   a !== b &&
-  [...a].toSorted().join() === [...b].toSorted().join() &&
+  a.split('').toSorted().join('') === b.split('').toSorted().join('') &&
   isOneSlip(a, b);
 
 /**
@@ -41,7 +41,8 @@ const isSwapped = (a: string, b: string): boolean =>
  * @returns The word it must be, or undefined.
  * @example
  * ```ts
- * mendWord('molecualr', LEXICON) // => 'molecular'
+ * import { LEXICON } from './lexicon.ts';
+ * mendWord('molecullar', LEXICON) // => 'molecular'
  * mendWord('metabisulfate', LEXICON) // => undefined
  * ```
  */

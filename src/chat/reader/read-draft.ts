@@ -1,6 +1,6 @@
 import type { Stage } from '../../core/wine.ts';
 import type { Board, Finder, Finding } from './board.ts';
-import { findingOf, holdsCue, isFound, placeOf } from './board.ts';
+import { findingOf, holdsCue, isFound, placeOf, termAt } from './board.ts';
 import { findAdditiveVolume } from './finders/additive-volume.ts';
 import { findAdditive } from './finders/additive.ts';
 import { findAllowance } from './finders/allowance.ts';
@@ -65,9 +65,10 @@ function shareVolume(board: Board, fields: Record<string, unknown>): void {
   const vessels = findingOf(board, 'vessels')?.value;
   if (vessels === undefined) return;
   const volume = findingOf(board, 'volume_L')?.value;
-  const isBarrels = vessels[0]!.startsWith('barrel ') || /^B\d/.test(vessels[0]!);
+  const isWorded = vessels[0]?.startsWith('barrel ') === true;
+  const isBarrels = isWorded || /^B\d/.test(vessels[0] ?? '');
   if (volume === undefined) {
-    if (vessels[0]!.startsWith('barrel ')) {
+    if (isWorded) {
       board.marks.barrelsAssumed_L = vessels.length * USUAL_BARREL_L;
       board.marks.barrelsCounted = true;
     }
@@ -82,8 +83,8 @@ function shareVolume(board: Board, fields: Record<string, unknown>): void {
   } else if (!board.marks.statedTotal && !holdsCue(board, 'altogether')) {
     delete fields['volume_L'];
     board.marks.eachOrTotal = true;
-    const { from, to } = findingOf(board, 'volume_L')!;
-    board.problems.push({ code: 'ambiguous-number', about: placeOf(board, from, to).text });
+    const place = findingOf(board, 'volume_L') ?? { from: 0, to: 0 };
+    board.problems.push({ code: 'ambiguous-number', about: placeOf(board, place.from, place.to).text });
     board.notes.push({ id: 'each-or-total', text: '' });
   }
 }
@@ -104,7 +105,7 @@ function fieldsOf(board: Board): Fields {
   const stage = mostCautious(stages);
   if (stage) fields['stage'] = stage;
   shareVolume(board, fields);
-  return fields as Fields;
+  return fields;
 }
 
 function placesOf(board: Board): Partial<Record<FieldName, Place>> {
@@ -120,7 +121,7 @@ function noteCask(board: Board): void {
     named &&
     board.terms
       .slice(named.from, named.to + 1)
-      .some((_, k) => board.terms[named.from + k]!.tags.includes('vessel:cask'))
+      .some((_, k) => termAt(board, named.from + k).tags.includes('vessel:cask'))
   )
     board.marks.castsWithoutSize = true;
 }

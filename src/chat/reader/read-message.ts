@@ -1,4 +1,3 @@
-import type { Waiting } from '../conversation/memory.ts';
 import type { Board } from './board.ts';
 import { recogniseEmergency } from './emergency.ts';
 import { finishReading } from './finish-reading.ts';
@@ -13,7 +12,7 @@ import { readRound } from './read-round.ts';
 import type { Term } from './split-terms.ts';
 import { splitTerms } from './split-terms.ts';
 import { isStrange, topicOf } from './topic.ts';
-import type { Draft, Reading, ReaderSettings, Understood } from './understood.ts';
+import type { AwaitedField, Draft, Reading, ReaderSettings, Understood } from './understood.ts';
 import { readWaiting } from './waiting-answer.ts';
 import type { Tag } from './words/words.ts';
 
@@ -25,8 +24,9 @@ function cuesOf(terms: readonly Term[]): ReadonlySet<Tag> {
   const words = terms.flatMap(({ kind, text }) => (kind === 'word' ? text.split(/[ -]/) : ['\n']));
   const cues = new Set<Tag>();
   for (let i = 0; i < words.length; i++) {
-    const most = LEXICON.longest.get(words[i]!) ?? 0;
-    for (let n = 1, phrase = words[i]!; n <= most; n++, phrase = `${phrase} ${words[i + n - 1] ?? '\n'}`) {
+    let phrase = words[i] ?? '';
+    const most = LEXICON.longest.get(phrase) ?? 0;
+    for (let n = 1; n <= most; n++, phrase = `${phrase} ${words[i + n - 1] ?? '\n'}`) {
       for (const tag of LEXICON.phrases.get(phrase)?.tags ?? []) cues.add(tag);
     }
   }
@@ -90,11 +90,12 @@ function readOne(board: Board, settings: ReaderSettings): Reading {
  * @returns The readings, each with what was said, assumed, asked and wrong.
  * @example
  * ```ts
+ * import { READER_DEFAULTS } from './reader-defaults.ts';
  * readMessage('T4 1450 gal pH 3.58 free 21', READER_DEFAULTS).readings[0].fields.vessel // => 'tank 4'
  * readMessage('hi', READER_DEFAULTS).readings[0].intent // => 'chat'
  * ```
  */
-export function readMessage(text: string, settings: ReaderSettings, waiting?: Waiting): Understood {
+export function readMessage(text: string, settings: ReaderSettings, waiting?: AwaitedField): Understood {
   const decimalMark = /\d,\d{1,2}(?!\d)/.test(text) && !/\d\.\d/.test(text) ? ',' : '.';
   const understood = (
     readings: readonly Reading[],

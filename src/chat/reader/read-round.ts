@@ -3,6 +3,7 @@ import { isFree } from './board.ts';
 import { finishReading } from './finish-reading.ts';
 import { readDraft } from './read-draft.ts';
 import type { Term } from './split-terms.ts';
+import { termIn } from './split-terms.ts';
 import type { Draft, Fields, Reading, ReaderSettings } from './understood.ts';
 
 /** A line read on its own. */
@@ -100,7 +101,7 @@ export function readRound(
     if (opens(line)) groups.push([...line.terms]);
     else if (line === first) continue;
     else if (line.draft.intent !== 'chat' && groups.at(-1))
-      groups.at(-1)!.push({ ...line.terms[0]!, kind: 'break', text: '\n', tags: [] }, ...line.terms);
+      groups.at(-1)?.push({ ...termIn(line.terms, 0), kind: 'break', text: '\n', tags: [] }, ...line.terms);
     else if (line.leftover) groups.push(undefined);
   }
   const readings = groups.map((terms) => {

@@ -19,6 +19,12 @@ export interface Term {
   readonly capital: boolean;
 }
 
+/** What stands before the first and after the last term. */
+const END: Term = { kind: 'break', text: '', start: 0, end: 0, gap: true, tags: [], capital: false };
+
+/** Term `i`; past either end an empty line end, so that a finder may look about freely. */
+export const termIn = (terms: readonly Term[], i: number): Term => terms[i] ?? END;
+
 const VULGAR: Readonly<Record<string, number>> = {
   '½': 1 / 2, '⅓': 1 / 3, '⅔': 2 / 3, '¼': 1 / 4, '¾': 3 / 4, '⅛': 1 / 8, '⅜': 3 / 8, '⅝': 5 / 8, '⅞': 7 / 8,
 }; // prettier-ignore
@@ -63,7 +69,7 @@ function unglue(word: string, lexicon: Lexicon): readonly string[] | undefined {
 }
 
 /** The pieces before words are looked up. */
-function cut(folded: FoldedText, lexicon: Lexicon): Term[] {
+function piecesOf(folded: FoldedText, lexicon: Lexicon): Term[] {
   const { text } = folded;
   const pieces: Term[] = [];
   let gap = true;
@@ -98,10 +104,11 @@ function cut(folded: FoldedText, lexicon: Lexicon): Term[] {
       end = wordEnd(text, i, lexicon);
       const beside = isDigit(text[i - 1]) || isDigit(text[end]);
       const parts = beside ? unglue(text.slice(i, end), lexicon) : undefined;
-      if (parts)
-        for (let at = i, k = 0; k < parts.length; at += parts[k++]!.length)
-          push('word', at, at + parts[k]!.length);
-      else push('word', i, end);
+      let at = i;
+      for (const part of parts ?? [text.slice(i, end)]) {
+        push('word', at, at + part.length);
+        at += part.length;
+      }
     } else if ((c === '-' || c === '=') && text[i + 1] === '>') {
       end = i + 2;
       push('mark', i, end);
@@ -120,12 +127,12 @@ function phraseAt(
   i: number,
   lexicon: Lexicon,
 ): { entry: Entry; next: number } | undefined {
-  const first = pieces[i]!;
+  const first = termIn(pieces, i);
   const most = lexicon.longest.get(first.text) ?? 0;
   let text = '';
   let found: { entry: Entry; next: number } | undefined;
   for (let k = i, words = 0; words < most && k < pieces.length; words++) {
-    const piece = pieces[k]!;
+    const piece = termIn(pieces, k);
     if (piece.kind !== 'word' && !(piece.kind === 'number' && words > 0 && piece.text === '2')) break;
     text = words === 0 ? piece.text : `${text} ${piece.text}`;
     k++;
@@ -145,22 +152,25 @@ function phraseAt(
  * @returns The terms in order; every character but blanks belongs to one.
  * @example
  * ```ts
+ * import { foldText } from './fold-text.ts';
+ * import { LEXICON } from './lexicon.ts';
  * splitTerms(foldText('free so2 18'), LEXICON).map((term) => term.text) // => ['free so2', '18']
  * ```
  */
 export function splitTerms(folded: FoldedText, lexicon: Lexicon): Term[] {
-  const pieces = cut(folded, lexicon);
+  const pieces = piecesOf(folded, lexicon);
   const terms: Term[] = [];
   for (let i = 0; i < pieces.length;) {
-    const piece = pieces[i]!;
+    const piece = termIn(pieces, i);
     const found = piece.kind === 'word' ? phraseAt(pieces, i, lexicon) : undefined;
     if (!found) {
       const mended = piece.kind === 'word' ? mendWord(piece.text, lexicon) : undefined;
-      terms.push(mended ? { ...piece, tags: lexicon.phrases.get(mended)!.tags } : piece);
+      const tags = mended === undefined ? undefined : lexicon.phrases.get(mended)?.tags;
+      terms.push(tags ? { ...piece, tags } : piece);
       i++;
       continue;
     }
-    const last = pieces[found.next - 1]!;
+    const last = termIn(pieces, found.next - 1);
     terms.push({
       ...piece,
       text: folded.text.slice(piece.start, last.end),

@@ -175,5 +175,11 @@ export interface ReaderSettings {
   readonly targets: { readonly red: number; readonly white: number; readonly sweet: number };
 }
 
+/** A question that the bot asked and still waits for, as far as reading its answer needs it. */
+export interface AwaitedField {
+  readonly field: AskedField;
+  readonly reading: Reading;
+}
+
 /** A reading before its assumptions and questions are worked out. */
 export type Draft = Omit<Reading, 'assumed' | 'asks'>;

@@ -8,7 +8,9 @@ export interface UnitAt {
   readonly to: number;
 }
 
+/** Units of volume, litres first. */
 export const VOLUME_UNITS: readonly UnitId[] = ['L', 'mL', 'cL', 'hL', 'm3', 'galUS', 'galUK', 'gal', 'floz'];
+/** Units of mass; tons and quintals are of fruit. */
 export const MASS_UNITS: readonly UnitId[] = ['g', 'mg', 'kg', 'lb', 'oz', 'ton', 'quintal'];
 
 /** The unit word at term `i`, among those asked for. */

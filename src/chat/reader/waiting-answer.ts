@@ -1,13 +1,12 @@
-import type { Waiting } from '../conversation/memory.ts';
 import { litresFrom } from '../../core/units/volume.ts';
 import { readDecimal, readNumeral } from './numbers.ts';
-import type { Fields, Reading, ReaderSettings } from './understood.ts';
+import type { AwaitedField, Fields, Reading, ReaderSettings } from './understood.ts';
 
 const bare = /^([+-]?)(\d+(?:[.,']\d+)?|\d{1,3}(?: \d{3})+)\s*(%|g|ppm|mg\/l|l|ph)?[.!]?$/;
 
 /** The fields that a bare number means while the bot waits for one. */
 function fieldsFor(
-  field: Waiting['field'],
+  field: AwaitedField['field'],
   value: number,
   unit: string | undefined,
   settings: ReaderSettings,
@@ -45,10 +44,14 @@ function fieldsFor(
  * @param text The folded message.
  * @returns A reading with that one field, or undefined where the message is more than a number.
  */
-export function readWaiting(text: string, waiting: Waiting, settings: ReaderSettings): Reading | undefined {
+export function readWaiting(
+  text: string,
+  waiting: AwaitedField,
+  settings: ReaderSettings,
+): Reading | undefined {
   const match = bare.exec(text);
   if (!match) return undefined;
-  const raw = match[2]!;
+  const raw = match[2] ?? '';
   const numeral =
     waiting.field === 'ph'
       ? { value: readDecimal(raw), unsure: false }

@@ -1,11 +1,11 @@
 import { expect, test } from 'vitest';
-import type { Waiting } from '../../../src/chat/conversation/memory.ts';
+import type { AwaitedField, Reading } from '../../../src/chat/reader/understood.ts';
 import { readMessage } from '../../../src/chat/reader/read-message.ts';
 import { READER_DEFAULTS } from '../../../src/chat/reader/reader-defaults.ts';
 
-const [partial] = readMessage('T4 pH 3.58 free 21', READER_DEFAULTS).readings;
+const [partial] = readMessage('T4 pH 3.58 free 21', READER_DEFAULTS).readings as [Reading];
 
-const ROWS: readonly (readonly [Waiting['field'], string, unknown])[] = [
+const ROWS: readonly (readonly [AwaitedField['field'], string, unknown])[] = [
   ['volume_L', '5200', { volume_L: 5200 }],
   ['volume_L', '5,200', { volume_L: 5200 }],
   ['ph', '3,58', { ph: 3.58 }],
@@ -21,7 +21,7 @@ const ROWS: readonly (readonly [Waiting['field'], string, unknown])[] = [
 ];
 
 test.each(ROWS)('while %s is asked, %j is its value', (field, text, fields) => {
-  const waiting: Waiting = { field, reading: partial!, askedAt: 0, letters: {} };
+  const waiting: AwaitedField = { field, reading: partial };
   expect(readMessage(text, READER_DEFAULTS, waiting).readings[0]?.fields).toEqual(fields);
 });
 
@@ -33,7 +33,7 @@ const BAD = [
 ] as const;
 
 test.each(BAD)('while %s is asked, %j is refused as %s', (field, text, code) => {
-  const waiting: Waiting = { field, reading: partial!, askedAt: 0, letters: {} };
+  const waiting: AwaitedField = { field, reading: partial };
   const [reading] = readMessage(text, READER_DEFAULTS, waiting).readings;
   expect(reading?.problems.map((problem) => problem.code)).toEqual([code]);
   expect(reading?.fields).toEqual({});

@@ -1,7 +1,7 @@
 import type { AdditiveId } from '../../../core/additives/additive-id.ts';
 import { readStrength } from '../../../core/additives/read-strength.ts';
 import type { Board } from '../board.ts';
-import { claim, figureAt, find, findingOf, hasTag, isCue, isFree, isMark, refuse } from '../board.ts';
+import { claim, figureAt, find, findingOf, hasTag, isCue, isFree, isMark, refuse, termAt } from '../board.ts';
 import type { UnitId } from '../words/words.ts';
 import { concentrationAt } from '../units.ts';
 
@@ -47,12 +47,12 @@ function strengthNear(board: Board, i: number): StrengthAt | undefined {
     const found = strengthFrom(board, k);
     if (found && found.to < i) return found;
     if (
-      board.terms[k]!.kind === 'number' ||
+      termAt(board, k).kind === 'number' ||
       !(
         joins(board, k) ||
         isMark(board, k, '%') ||
         isMark(board, k, '/') ||
-        board.terms[k]!.tags.some((tag) => /^unit:(g|L)$/.test(tag))
+        termAt(board, k).tags.some((tag) => /^unit:(g|L)$/.test(tag))
       )
     )
       break;
@@ -111,7 +111,7 @@ function findKnown(board: Board, i: number, named: AdditiveId): void {
     keep(board, named, i, i);
     return refuse(board, 'ambiguous-number', strength.from, strength.to);
   }
-  const read = readStrength(id, percent, saysSalt, CLEAR_NAME.test(board.terms[i]!.text));
+  const read = readStrength(id, percent, saysSalt, CLEAR_NAME.test(termAt(board, i).text));
   if ('problem' in read) {
     const twoNames = id === 'sulfur-dioxide-solution' && read.problem === 'ambiguous-number';
     if (twoNames) claim(board, i, i);
@@ -144,7 +144,7 @@ function findBareSO2(board: Board, i: number): void {
 /** Finds the additive and its strength. Powder or solution: the word, or a strength up to 25 %, tells. */
 export function findAdditive(board: Board): void {
   for (let i = 0; i < board.terms.length; i++) {
-    if (board.taken[i] === true || board.terms[i]!.kind !== 'word') continue;
+    if (board.taken[i] === true || termAt(board, i).kind !== 'word') continue;
     const id = KNOWN.find((one) => hasTag(board, i, `additive:${one}`));
     if (id) findKnown(board, i, id);
     else if (hasTag(board, i, 'label:so2')) findBareSO2(board, i);

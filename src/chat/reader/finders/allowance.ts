@@ -1,5 +1,5 @@
 import type { Board } from '../board.ts';
-import { figureAt, find, isCue, isFree, isMark, refuse } from '../board.ts';
+import { figureAt, find, isCue, isFree, isMark, refuse, termAt } from '../board.ts';
 
 const isPercent = (board: Board, i: number): boolean =>
   isMark(board, i, '%') || board.terms[i]?.text === 'percent' || board.terms[i]?.text === 'pct';
@@ -53,7 +53,7 @@ export function findAllowance(board: Board): void {
       if (value < 1 && findShareAt(board, value, i, i + 2)) i += 2;
     } else if (isFree(board, i)) {
       const { value } = figureAt(board, i);
-      if (!findPercentAt(board, i) && value < 1 && board.terms[i]!.value !== undefined)
+      if (!findPercentAt(board, i) && value < 1 && termAt(board, i).value !== undefined)
         findShareAt(board, value, i, i);
     } else {
       const share = SHARES.find(([cue]) => isCue(board, i, cue));

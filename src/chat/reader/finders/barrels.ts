@@ -1,11 +1,14 @@
 import { LITRES_IN } from '../../../core/units/volume.ts';
 import type { Board } from '../board.ts';
-import { claim, figureAt, find, hasTag, isCue, isFound, isFree, isMark, refuse } from '../board.ts';
+import { claim, figureAt, find, hasTag, isCue, isFound, isFree, isMark, refuse, termAt } from '../board.ts';
 import type { UnitId } from '../words/words.ts';
 import { unitAt } from '../units.ts';
 
 /** Litres in a barrel whose size nobody said; common practice, no source. */
 export const USUAL_BARREL_L = 225;
+
+/** More barrels than any cellar has in one reading; own threshold, no source. */
+const MOST_BARRELS = 10_000;
 
 const SIZE_UNITS: readonly UnitId[] = ['L', 'gal', 'galUS', 'galUK', 'hL'];
 
@@ -29,15 +32,15 @@ export function noteUnit(board: Board, unit: UnitId): void {
 }
 
 /** A size in litres or gallons at term `i`; without a unit only where `bare` allows (`40 x 228`). */
-function sizeAt(board: Board, i: number, bare: boolean): { litres: number; to: number } | undefined {
+function sizeAt(board: Board, i: number, bare: boolean): { volume_L: number; to: number } | undefined {
   if (!isFree(board, i)) return undefined;
   const { value } = figureAt(board, i);
   const unit = unitAt(board, i + 1, SIZE_UNITS);
   if (unit) {
     noteUnit(board, unit.id);
-    return { litres: value * litresOf(board, unit.id), to: unit.to };
+    return { volume_L: value * litresOf(board, unit.id), to: unit.to };
   }
-  return bare && value >= 100 && value <= 700 ? { litres: value, to: i } : undefined;
+  return bare && value >= 100 && value <= 700 ? { volume_L: value, to: i } : undefined;
 }
 
 /** `40 x 225 L`, `6 x 60 gal barrels`, `6 barrels of 228`, `6 barrels (228 L)`, `6 225 L barrels`. */
@@ -53,7 +56,7 @@ function findCounted(board: Board, i: number): boolean {
     const size = sizeAt(board, i + 2, true);
     if (!size) return false;
     const hasWord = isBarrel(board, size.to + 1) || hasTag(board, size.to + 1, 'vessel:cask');
-    return keep(board, count, size.litres, from, hasWord ? size.to + 1 : size.to);
+    return keep(board, count, size.volume_L, from, hasWord ? size.to + 1 : size.to);
   }
   if (!named) {
     const size = sizeAt(board, i + 1, false);
@@ -61,8 +64,8 @@ function findCounted(board: Board, i: number): boolean {
       size !== undefined &&
       isBarrel(board, size.to + 1) &&
       count < 1000 &&
-      /^\d+$/.test(board.terms[i]!.text);
-    return isSize && keep(board, count, size.litres, from, size.to + 1);
+      /^\d+$/.test(termAt(board, i).text);
+    return isSize && keep(board, count, size.volume_L, from, size.to + 1);
   }
   let at = i + 2;
   while (
@@ -75,13 +78,17 @@ function findCounted(board: Board, i: number): boolean {
   )
     at++;
   const size = at <= i + 4 ? sizeAt(board, at, at > i + 2) : undefined;
-  if (size && (at > i + 2 || size.litres <= 700)) {
+  if (size && (at > i + 2 || size.volume_L <= 700)) {
     const each = isCue(board, size.to + 1, 'each') ? size.to + 1 : size.to;
-    return keep(board, count, size.litres, from, each);
+    return keep(board, count, size.volume_L, from, each);
   }
   if (!isBarrel(board, i + 1)) {
     board.marks.castsWithoutSize = true;
     claim(board, from, i + 1);
+    return true;
+  }
+  if (count > MOST_BARRELS) {
+    refuse(board, 'value-out-of-range', from, i + 1);
     return true;
   }
   if (count === 0) {
@@ -96,9 +103,9 @@ function findCounted(board: Board, i: number): boolean {
   return true;
 }
 
-function keep(board: Board, count: number, litres: number, from: number, to: number): boolean {
-  if (Number.isInteger(count)) board.marks.containers = count;
-  find(board, 'volume_L', count * litres, 'unit', from, to);
+function keep(board: Board, count: number, volume_L: number, from: number, to: number): boolean {
+  if (count <= MOST_BARRELS) board.marks.containers = count;
+  find(board, 'volume_L', count * volume_L, 'unit', from, to);
   return true;
 }
 
@@ -106,10 +113,10 @@ function keep(board: Board, count: number, litres: number, from: number, to: num
 export function findBarrels(board: Board): void {
   for (let i = 0; i < board.terms.length; i++) {
     if (isFree(board, i)) findCounted(board, i);
-    else if (board.taken[i] !== true && board.terms[i]!.kind === 'word') {
+    else if (board.taken[i] !== true && termAt(board, i).kind === 'word') {
       if (isBarrel(board, i) && !isFound(board, 'vessel') && !isFound(board, 'vessels')) {
         const size = sizeAt(board, i + 1, false);
-        if (!size && board.marks.barrelsAssumed_L === undefined && !/s$/.test(board.terms[i]!.text))
+        if (!size && board.marks.barrelsAssumed_L === undefined && !termAt(board, i).text.endsWith('s'))
           board.marks.barrelsAssumed_L = USUAL_BARREL_L;
       }
       if (hasTag(board, i, 'vessel:cask')) board.marks.castsWithoutSize = true;

@@ -1,6 +1,6 @@
 import type { Category, Product, Style } from '../../../core/wine.ts';
 import type { Board } from '../board.ts';
-import { find, hasTag, isCue } from '../board.ts';
+import { find, hasTag, isCue, termAt } from '../board.ts';
 
 const STYLES: readonly Style[] = ['red', 'white', 'rosé'];
 const CATEGORIES: readonly Category[] = ['sweet', 'sparkling', 'fortified'];
@@ -8,7 +8,7 @@ const PRODUCTS: readonly Product[] = ['cider', 'mead', 'fruit-wine'];
 
 /** `rose to 3.6` is a verb, `sample port` a tap. */
 function isOtherwise(board: Board, i: number): boolean {
-  const { text } = board.terms[i]!;
+  const { text } = termAt(board, i);
   if (text === 'rose')
     return isCue(board, i + 1, 'to') || isCue(board, i + 1, 'by') || isCue(board, i + 1, 'from');
   return (
@@ -20,7 +20,7 @@ function isOtherwise(board: Board, i: number): boolean {
 /** Finds colour, category and product, and the word organic. */
 export function findKind(board: Board): void {
   for (let i = 0; i < board.terms.length; i++) {
-    if (board.taken[i] === true || board.terms[i]!.kind !== 'word' || isOtherwise(board, i)) continue;
+    if (board.taken[i] === true || termAt(board, i).kind !== 'word' || isOtherwise(board, i)) continue;
     const style = STYLES.find((one) => hasTag(board, i, `style:${one}`));
     const category = CATEGORIES.find((one) => hasTag(board, i, `category:${one}`));
     const product = PRODUCTS.find((one) => hasTag(board, i, `product:${one}`));

@@ -1,5 +1,5 @@
 import type { Board } from '../board.ts';
-import { figureAt, find, isFree, isMark } from '../board.ts';
+import { figureAt, find, isFree, isMark, termAt } from '../board.ts';
 
 const FREE_LETTERS = new Set(['f', 'l']);
 
@@ -15,7 +15,7 @@ function letterAt(board: Board, i: number, letters: ReadonlySet<string>): number
 export function findLetterPair(board: Board): void {
   for (let i = 0; i < board.terms.length; i++) {
     const free = letterAt(board, i, FREE_LETTERS);
-    if (free === undefined || (board.terms[i - 1]?.kind === 'number' && !board.terms[i]!.gap)) continue;
+    if (free === undefined || (board.terms[i - 1]?.kind === 'number' && !termAt(board, i).gap)) continue;
     const next = isMark(board, free + 1, ',') || isMark(board, free + 1, '/') ? free + 2 : free + 1;
     const total = letterAt(board, next, new Set(['t']));
     if (total === undefined) continue;

@@ -1,6 +1,6 @@
 import { GRAMS_IN } from '../../../core/units/mass.ts';
 import type { Board } from '../board.ts';
-import { claim, figureAt, find, hasTag, isCue, isFree, isMark, refuse } from '../board.ts';
+import { claim, figureAt, find, hasTag, isCue, isFree, isMark, refuse, termAt } from '../board.ts';
 import type { UnitId } from '../words/words.ts';
 import { MASS_UNITS, concentrationAt, unitAt } from '../units.ts';
 
@@ -15,17 +15,17 @@ const skipsTo = (board: Board, i: number): number =>
   isCue(board, i, 'of') || isCue(board, i, 'article') ? i + 1 : i;
 
 /** A `G` with "of must", "of wine", "of juice" may mean gallons; grams of wine nobody weighs. */
-export const mayBeGallons = (board: Board, unit: number): boolean => {
-  const term = board.terms[unit];
-  return term?.text === 'g' && isCue(board, unit + 1, 'of') && isCue(board, unit + 2, 'wine');
+export const mayBeGallons = (board: Board, i: number): boolean => {
+  const term = board.terms[i];
+  return term?.text === 'g' && isCue(board, i + 1, 'of') && isCue(board, i + 2, 'wine');
 };
 
 const isFruit = (board: Board, i: number): boolean => isCue(board, skipsTo(board, i), 'fruit');
 
 /** `1 lb 4 oz` is one mass. */
-function ouncesAfter(board: Board, i: number): { grams: number; to: number } | undefined {
+function ouncesAfter(board: Board, i: number): { mass_g: number; to: number } | undefined {
   const unit = isFree(board, i) ? unitAt(board, i + 1, ['oz']) : undefined;
-  return unit && { grams: figureAt(board, i).value * gramsOf('oz'), to: unit.to };
+  return unit && { mass_g: figureAt(board, i).value * gramsOf('oz'), to: unit.to };
 }
 
 function findMassAt(board: Board, i: number): void {
@@ -33,7 +33,7 @@ function findMassAt(board: Board, i: number): void {
   if (!unit || concentrationAt(board, i + 1)) return;
   const { value, from } = figureAt(board, i);
   if (unit.id === 'mg' && !board.terms[unit.to + 1]?.tags.some((tag) => tag.startsWith('additive'))) return;
-  if (mayBeGallons(board, unit.to) || isThreeDigits(board.terms[i]!.text) || Number.isNaN(value))
+  if (mayBeGallons(board, unit.to) || isThreeDigits(termAt(board, i).text) || Number.isNaN(value))
     return refuse(board, 'ambiguous-number', i, unit.to);
   if (
     isFruit(board, unit.to + 1) ||
@@ -51,7 +51,7 @@ function findMassAt(board: Board, i: number): void {
       : undefined;
   const range = isMark(board, i - 1, '-') && isFree(board, i - 2) && from === i;
   if (range) return refuse(board, 'ambiguous-number', i - 2, unit.to);
-  find(board, 'mass_g', value * gramsOf(unit.id) + (more?.grams ?? 0), 'unit', from, more?.to ?? unit.to);
+  find(board, 'mass_g', value * gramsOf(unit.id) + (more?.mass_g ?? 0), 'unit', from, more?.to ?? unit.to);
 }
 
 /** Finds a mass of additive. Fruit by weight is no mass: it asks for the volume. */

@@ -1,5 +1,5 @@
 import type { Board } from '../board.ts';
-import { findingOf, hasTag, holdsCue, isCue, isFound, placeOf, refuse } from '../board.ts';
+import { findingOf, hasTag, holdsCue, isCue, isFound, placeOf, refuse, termAt } from '../board.ts';
 
 const CHEMICAL_SLIP = /^(meta)?bi?sul(f|ph)ates?$|metabisul(f|ph)(ate|ide)s?$/;
 
@@ -16,7 +16,7 @@ function placeAfter(board: Board, to: number): number {
 
 function refuseWord(board: Board, i: number): void {
   const { text } = placeOf(board, i, i);
-  if (CHEMICAL_SLIP.test(board.terms[i]!.text.split(' ').at(-1) ?? ''))
+  if (CHEMICAL_SLIP.test(termAt(board, i).text.split(' ').at(-1) ?? ''))
     board.notes.push({ id: 'did-you-mean', text });
   refuse(board, 'unknown-additive', i, i);
 }
@@ -43,7 +43,8 @@ export function findOtherAdditive(board: Board): void {
   if (named) return;
   const anywhere = board.terms.findIndex((_, i) => isNone(i));
   if (anywhere < 0) return;
-  const isWick = /wick|stick|disc|strip|candle/.test(board.terms[anywhere]!.text) && isFound(board, 'vessel');
+  const isWick =
+    /wick|stick|disc|strip|candle/.test(termAt(board, anywhere).text) && isFound(board, 'vessel');
   const counted = isWick || board.terms[anywhere - 1]?.kind === 'number';
   const wanted =
     counted ||

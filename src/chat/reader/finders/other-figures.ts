@@ -1,9 +1,9 @@
 import type { Board } from '../board.ts';
-import { hasTag, isCue, isFree, isMark, refuse, setAside } from '../board.ts';
+import { hasTag, isCue, isFree, isMark, refuse, setAside, termAt } from '../board.ts';
 
 const textAt = (board: Board, i: number): string => board.terms[i]?.text ?? '';
 const isPlainWhole = (board: Board, i: number): boolean =>
-  isFree(board, i) && /^\d+$/.test(textAt(board, i)) && board.terms[i]!.value === undefined;
+  isFree(board, i) && /^\d+$/.test(textAt(board, i)) && termAt(board, i).value === undefined;
 const isLabelBefore = (board: Board, i: number): boolean =>
   board.terms[i - 1]?.tags.some((tag) => tag.startsWith('label:') && tag !== 'label:aside') === true;
 const isUnitAfter = (board: Board, i: number): boolean =>
@@ -13,7 +13,7 @@ const isUnitAfter = (board: Board, i: number): boolean =>
 function dateEnd(board: Board, i: number): number | undefined {
   const mark = textAt(board, i + 1);
   if ((mark !== '/' && mark !== '-') || textAt(board, i + 3) !== mark) return undefined;
-  return [i, i + 2, i + 4].every((k) => isPlainWhole(board, k)) && board.terms[i + 1]!.gap === false
+  return [i, i + 2, i + 4].every((k) => isPlainWhole(board, k)) && termAt(board, i + 1).gap === false
     ? i + 4
     : undefined;
 }
@@ -23,8 +23,8 @@ function clockEnd(board: Board, i: number): number | undefined {
   if (
     !isMark(board, i + 1, ':') ||
     !isPlainWhole(board, i + 2) ||
-    board.terms[i + 1]!.gap ||
-    board.terms[i + 2]!.gap
+    termAt(board, i + 1).gap ||
+    termAt(board, i + 2).gap
   )
     return undefined;
   return hasTag(board, i + 3, 'unit:none-of-ours') ? i + 3 : i + 2;
@@ -32,7 +32,7 @@ function clockEnd(board: Board, i: number): number | undefined {
 
 function vintageEnd(board: Board, i: number): number | undefined {
   const text = textAt(board, i);
-  const year = /^(19[89]\d|20[0-3]\d)$/.test(text) && board.terms[i]!.value === undefined;
+  const year = /^(19[89]\d|20[0-3]\d)$/.test(text) && termAt(board, i).value === undefined;
   return year && !isUnitAfter(board, i) && !isLabelBefore(board, i) && !isCue(board, i + 1, 'thousand')
     ? i
     : undefined;
@@ -55,7 +55,7 @@ function brokenDecimalEnd(board: Board, i: number): number | undefined {
     isMark(board, i + 1, '.') || (isMark(board, i + 1, ',') && hasTag(board, i - 1, 'label:ph'));
   return isPoint &&
     /^\d{1,2}$/.test(textAt(board, i + 2)) &&
-    board.terms[i + 2]!.gap &&
+    termAt(board, i + 2).gap &&
     !isUnitAfter(board, i + 2) &&
     !hasTag(board, i + 3, 'label:free')
     ? i + 2
@@ -85,7 +85,7 @@ export function findOtherFigures(board: Board): void {
       board.taken[i] = true;
       continue;
     }
-    const from = isMark(board, i - 1, "'") && !board.terms[i]!.gap ? i - 1 : i;
+    const from = isMark(board, i - 1, "'") && !termAt(board, i).gap ? i - 1 : i;
     const short = from < i && /^\d\d$/.test(textAt(board, i)) ? i : undefined;
     const named = namedEnd(board, i);
     const end = short ?? dateEnd(board, i) ?? clockEnd(board, i) ?? named ?? vintageEnd(board, i);

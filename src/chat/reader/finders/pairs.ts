@@ -1,5 +1,5 @@
 import type { Board } from '../board.ts';
-import { decimalAt, figureAt, find, hasTag, isFound, isFree, isMark, refuse } from '../board.ts';
+import { decimalAt, figureAt, find, hasTag, isFound, isFree, isMark, refuse, termAt } from '../board.ts';
 import { concentrationAt } from '../units.ts';
 
 /** Below this ratio the second figure may be the next mark of a scale, not the total. */
@@ -7,7 +7,7 @@ const LEAST_CLEAR_RATIO = 1.2;
 
 const isPhLike = (board: Board, i: number): boolean => {
   const { value } = decimalAt(board, i);
-  return /^\d[.,']\d+$/.test(board.terms[i]!.text) && value >= 2.7 && value <= 4.5;
+  return /^\d[.,']\d+$/.test(termAt(board, i).text) && value >= 2.7 && value <= 4.5;
 };
 
 const isSlash = (board: Board, i: number): boolean => isMark(board, i, '/');

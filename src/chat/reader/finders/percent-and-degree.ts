@@ -1,6 +1,6 @@
 import { celsiusFrom } from '../../../core/units/temperature.ts';
 import type { Board } from '../board.ts';
-import { figureAt, find, hasTag, isFree, isMark, refuse } from '../board.ts';
+import { figureAt, find, hasTag, isFree, isMark, refuse, termAt } from '../board.ts';
 
 const isPercent = (board: Board, i: number): boolean =>
   isMark(board, i, '%') || ['percent', 'pct'].includes(board.terms[i]?.text ?? '');
@@ -23,7 +23,7 @@ function findDegrees(board: Board, i: number): void {
   const at = sign ? i + 2 : i + 1;
   const unit = unitOf(board, at);
   const { value, from } = figureAt(board, i);
-  if (unit === 'F' && !sign && board.terms[at]!.gap && value < 40) return;
+  if (unit === 'F' && !sign && termAt(board, at).gap && value < 40) return;
   if (unit) find(board, 'temperature_C', celsiusFrom(value, unit), 'unit', from, at);
   else if (sign && hasTag(board, at, 'label:alcohol'))
     find(board, 'alcohol_percent', value, 'labelled', i, at);

@@ -1,5 +1,5 @@
 import type { Board } from '../board.ts';
-import { claim, figureAt, find, hasTag, isCue, isFound, isFree, isMark, refuse } from '../board.ts';
+import { claim, figureAt, find, hasTag, isCue, isFound, isFree, isMark, refuse, termAt } from '../board.ts';
 import type { UnitId } from '../words/words.ts';
 import type { UnitAt } from '../units.ts';
 import { VOLUME_UNITS, concentrationAt, unitAt } from '../units.ts';
@@ -25,10 +25,10 @@ function perAfter(board: Board, i: number): number | undefined {
 function baseAt(
   board: Board,
   i: number,
-): { litres?: number; fruit?: true; unsure?: true; to: number } | undefined {
+): { volume_L?: number; fruit?: true; unsure?: true; to: number } | undefined {
   const figure = isFree(board, i) ? figureAt(board, i) : undefined;
   const at = figure ? i + 1 : i;
-  if (hasTag(board, at, 'vessel:barrel')) return { litres: (figure?.value ?? 1) * USUAL_BARREL_L, to: at };
+  if (hasTag(board, at, 'vessel:barrel')) return { volume_L: (figure?.value ?? 1) * USUAL_BARREL_L, to: at };
   const term = board.terms[at];
   if (figure && term?.text === 'g' && term.capital && [60, 1000].includes(figure.value))
     return { unsure: true, to: at };
@@ -36,7 +36,7 @@ function baseAt(
   if (mass) return { fruit: true, to: mass.to };
   const volume = unitAt(board, at, VOLUME_UNITS);
   if (!volume || (figure && (figure.unsure || !(figure.value > 0)))) return undefined;
-  return { litres: (figure?.value ?? 1) * litresOf(board, volume.id), to: volume.to };
+  return { volume_L: (figure?.value ?? 1) * litresOf(board, volume.id), to: volume.to };
 }
 
 /** `40 g per barrel`: a mass for a usual barrel; with a volume beside it, nobody knows of which. */
@@ -58,7 +58,7 @@ function findPerBarrel(board: Board, i: number, unit: UnitAt): void {
 function findRateAt(board: Board, i: number): void {
   const unit = unitAt(board, i + 1, MASSES);
   if (!unit || concentrationAt(board, i + 1)) return;
-  if (isCue(board, unit.to + 1, 'each') && /barrel|bbl/.test(board.terms[unit.to + 1]!.text))
+  if (isCue(board, unit.to + 1, 'each') && /barrel|bbl/.test(termAt(board, unit.to + 1).text))
     return findPerBarrel(board, i, unit);
   const per = perAfter(board, unit.to + 1);
   const base = per === undefined ? undefined : baseAt(board, per + 1);
@@ -67,14 +67,14 @@ function findRateAt(board: Board, i: number): void {
   if (unsure || base.unsure) return refuse(board, 'ambiguous-number', i, base.to);
   const between = (from: number, to: number): void => {
     for (let k = from; k <= to; k++)
-      if (!board.terms[k]!.tags.some((tag) => tag.startsWith('additive'))) claim(board, k, k);
+      if (!termAt(board, k).tags.some((tag) => tag.startsWith('additive'))) claim(board, k, k);
   };
   if (base.fruit) {
     board.marks.fruitByWeight = true;
     board.marks.fruitRate = true;
     return between(i, base.to);
   }
-  const rate = (value * gramsOf(unit.id) * 1000) / base.litres!;
+  const rate = (value * gramsOf(unit.id) * 1000) / (base.volume_L ?? Number.NaN);
   const single = per + 1 === base.to && unit.id === 'g' && unitAt(board, per + 1, ['L', 'hL']) !== undefined;
   if (single) return refuse(board, 'ambiguous-number', i, base.to);
   find(board, 'rate_mg_L', rate, 'unit', i, unit.to);

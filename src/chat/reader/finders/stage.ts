@@ -1,6 +1,6 @@
 import type { Stage } from '../../../core/wine.ts';
 import type { Board } from '../board.ts';
-import { claim, find, hasTag, isCue, isMark } from '../board.ts';
+import { claim, find, hasTag, isCue, isMark, termAt } from '../board.ts';
 
 const STAGES: readonly Stage[] = ['fermenting', 'malolactic', 'must', 'base', 'bottled', 'finished'];
 
@@ -10,7 +10,7 @@ const isLabelled = (board: Board, i: number): boolean =>
 
 /** `350 mL` is a volume; `free 20 ML done` and `ML done` are not. */
 function isUnit(board: Board, i: number): boolean {
-  const [term, before] = [board.terms[i]!, board.terms[i - 1]];
+  const [term, before] = [termAt(board, i), board.terms[i - 1]];
   if (!hasTag(board, i, 'unit:mL') || before?.kind !== 'number') return false;
   const speaksOfMalo = isCue(board, i + 1, 'over') || isCue(board, i + 1, 'ml-bugs');
   return !(speaksOfMalo && (term.capital || isLabelled(board, i - 2)));
@@ -53,7 +53,7 @@ function stopsFerment(board: Board, i: number): boolean {
  */
 export function findStage(board: Board): void {
   for (let i = 0; i < board.terms.length; i++) {
-    if (board.terms[i]!.kind !== 'word' || board.taken[i] === true) continue;
+    if (termAt(board, i).kind !== 'word' || board.taken[i] === true) continue;
     if (isCue(board, i, 'past-ferment')) claim(board, i, i);
     else if (stopsFerment(board, i)) {
       board.marks.stopsFerment = true;

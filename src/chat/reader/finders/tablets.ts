@@ -31,11 +31,11 @@ function saltNear(board: Board, i: number): AdditiveId | undefined {
 }
 
 /** A size in grams within a few terms of the tablet word. */
-function sizeNear(board: Board, i: number): { grams: number; from: number; to: number } | undefined {
+function sizeNear(board: Board, i: number): { mass_g: number; from: number; to: number } | undefined {
   for (const k of [i - 2, i - 3, i + 1, i + 2, i + 3, i + 4, i - 4]) {
     if (board.terms[k]?.kind === 'break') continue;
     const unit = isFree(board, k) ? unitAt(board, k + 1, ['g']) : undefined;
-    if (unit) return { grams: figureAt(board, k).value, from: k, to: unit.to };
+    if (unit) return { mass_g: figureAt(board, k).value, from: k, to: unit.to };
   }
   return undefined;
 }
@@ -64,8 +64,8 @@ function findCampden(board: Board, i: number): void {
   const salt = saltNear(board, i);
   if (salt) find(board, 'additive', salt, 'labelled', i, i);
   claim(board, i, i);
-  if (size && size.grams > 0 && size.grams <= LARGEST_PLAIN_TABLET_g)
-    find(board, 'tablet_salt_g', size.grams, 'unit', size.from, size.to);
+  if (size && size.mass_g > 0 && size.mass_g <= LARGEST_PLAIN_TABLET_g)
+    find(board, 'tablet_salt_g', size.mass_g, 'unit', size.from, size.to);
   const counted = count ?? after;
   if (counted !== undefined) find(board, 'tablets', figureAt(board, counted).value, 'unit', counted, counted);
 }
@@ -77,11 +77,12 @@ function findEffervescent(board: Board, i: number): void {
   find(board, 'additive', 'tablet', 'labelled', i, i);
   for (const k of [i - 1, i + 1])
     if (isCue(board, k, 'effervescent') || hasTag(board, k, 'label:so2')) claim(board, k, k);
-  const tablets = count === undefined ? undefined : figureAt(board, count).value;
-  if (size) find(board, 'tablet_SO2_g', size.grams, 'unit', size.from, size.to);
+  if (size) find(board, 'tablet_SO2_g', size.mass_g, 'unit', size.from, size.to);
   else board.marks.tabletsOfUnknownSize = true;
-  if (tablets !== undefined && size) find(board, 'mass_g', tablets * size.grams, 'unit', count!, count!);
-  else if (tablets !== undefined) find(board, 'tablets', tablets, 'unit', count!, count!);
+  if (count === undefined) return;
+  const tablets = figureAt(board, count).value;
+  if (size) find(board, 'mass_g', tablets * size.mass_g, 'unit', count, count);
+  else find(board, 'tablets', tablets, 'unit', count, count);
 }
 
 /** `5 g sachet`: grams of SO2 or of product? Nobody can tell. */

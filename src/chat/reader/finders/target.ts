@@ -1,6 +1,17 @@
 import type { Target } from '../../../core/wine.ts';
 import type { Board } from '../board.ts';
-import { decimalAt, find, hasTag, holdsCue, isCue, isFound, isFree, isMark, refuse } from '../board.ts';
+import {
+  decimalAt,
+  find,
+  hasTag,
+  holdsCue,
+  isCue,
+  isFound,
+  isFree,
+  isMark,
+  refuse,
+  termAt,
+} from '../board.ts';
 import { isCellarTalk } from '../refine/unlabelled.ts';
 import { MASS_UNITS, VOLUME_UNITS, concentrationAt, mg_L_IN, unitAt } from '../units.ts';
 
@@ -32,10 +43,10 @@ const isOther = (board: Board, i: number): boolean =>
   isMark(board, i, '°') ||
   hasTag(board, i, 'vessel:barrel') ||
   hasTag(board, i, 'unit:none-of-ours') ||
-  (isCue(board, i, 'thousand') && board.terms[i]!.gap === false) ||
+  (isCue(board, i, 'thousand') && termAt(board, i).gap === false) ||
   isMark(board, i, '×') ||
   board.terms[i]?.text === 'x' ||
-  (isMark(board, i, '/') && board.terms[i]!.gap === false);
+  (isMark(board, i, '/') && termAt(board, i).gap === false);
 
 const noteUnit = (board: Board, i: number): void => {
   const unit = concentrationAt(board, i)?.id;
@@ -211,11 +222,11 @@ export function findTarget(board: Board): void {
     if (
       isMark(board, i, '+') &&
       board.terms[i + 1]?.gap === false &&
-      (board.terms[i]!.gap || board.terms[i - 1]?.kind !== 'number')
+      (termAt(board, i).gap || board.terms[i - 1]?.kind !== 'number')
     ) {
       const aim = aimAt(board, i + 1);
       if (aim) keepAddition(board, aim, i);
-    } else if (board.terms[i]!.kind !== 'number' && isVerb(board, i)) findVerb(board, i);
+    } else if (termAt(board, i).kind !== 'number' && isVerb(board, i)) findVerb(board, i);
   }
   for (let i = 0; i < board.terms.length; i++) {
     if (board.taken[i] !== true && isCue(board, i, 'molecular')) findMolecular(board, i);

@@ -1,5 +1,5 @@
 import type { Board } from '../board.ts';
-import { claim, find, hasTag, isCue, isFree, isMark, refuse } from '../board.ts';
+import { claim, find, hasTag, isCue, isFree, isMark, refuse, termAt } from '../board.ts';
 import { MASS_UNITS, VOLUME_UNITS, concentrationAt, unitAt } from '../units.ts';
 
 /** One vessel as it stands in the text. */
@@ -12,7 +12,7 @@ interface Named {
 }
 
 const isWholeAt = (board: Board, i: number): boolean =>
-  isFree(board, i) && board.terms[i]!.value === undefined && /^\d{1,4}$/.test(board.terms[i]!.text);
+  isFree(board, i) && termAt(board, i).value === undefined && /^\d{1,4}$/.test(termAt(board, i).text);
 
 /** Whether the number at `i` is a figure with a unit of its own, so that no vessel word may claim it. */
 function hasOwnUnit(board: Board, i: number): boolean {
@@ -21,8 +21,8 @@ function hasOwnUnit(board: Board, i: number): boolean {
     unitAt(board, i + 1, MASS_UNITS) !== undefined ||
     concentrationAt(board, i + 1) !== undefined ||
     isMark(board, i + 1, '%') ||
-    (isCue(board, i + 1, 'thousand') && board.terms[i + 1]!.gap === false) ||
-    (isMark(board, i + 1, '/') && !board.terms[i + 1]!.gap)
+    (isCue(board, i + 1, 'thousand') && termAt(board, i + 1).gap === false) ||
+    (isMark(board, i + 1, '/') && !termAt(board, i + 1).gap)
   );
 }
 
@@ -36,13 +36,13 @@ function suffix(board: Board, i: number): { letter: string; to: number } {
 const kindOf = (board: Board, i: number): string | undefined => {
   if (hasTag(board, i, 'vessel:tank')) return 'tank';
   if (hasTag(board, i, 'vessel:barrel') || hasTag(board, i, 'vessel:cask')) return 'barrel';
-  return hasTag(board, i, 'vessel:other') ? board.terms[i]!.text.toUpperCase() : undefined;
+  return hasTag(board, i, 'vessel:other') ? termAt(board, i).text.toUpperCase() : undefined;
 };
 
 /** `tank 4`, `tank #4`, `tank no. 4`, `barrel 17`, `tank B`. */
 function worded(board: Board, i: number): Named | undefined {
   const kind = kindOf(board, i);
-  if (kind === undefined || (board.terms[i]!.text === 'stuck' && board.terms[i - 1]?.kind !== 'number'))
+  if (kind === undefined || (termAt(board, i).text === 'stuck' && board.terms[i - 1]?.kind !== 'number'))
     return undefined;
   let k = i + 1;
   while (
@@ -59,7 +59,7 @@ function worded(board: Board, i: number): Named | undefined {
     if (isMark(board, k + 1, 'x') || board.terms[k + 1]?.text === 'x' || isMark(board, k + 1, '×'))
       return undefined;
     const { letter, to } = suffix(board, k);
-    const number = Number(board.terms[k]!.text);
+    const number = Number(termAt(board, k).text);
     return { name: `${kind} ${number}${letter}`, kind, ...(letter ? {} : { number }), from: i, to };
   }
   const single = board.terms[i + 1];
@@ -80,13 +80,13 @@ const NO_CODE =
 
 /** `T4`, `T-4`, `FV3`, `B17`: letters and a whole number with nothing between but a hyphen. */
 function coded(board: Board, i: number): Named | undefined {
-  const word = board.terms[i]!;
+  const word = termAt(board, i);
   if (!/^[a-z]{1,4}$/.test(word.text) || (board.terms[i - 1]?.kind === 'number' && !word.gap))
     return undefined;
-  const hyphen = isMark(board, i + 1, '-') && board.terms[i + 1]!.gap === false;
+  const hyphen = isMark(board, i + 1, '-') && termAt(board, i + 1).gap === false;
   const k = hyphen ? i + 2 : i + 1;
   if (!isWholeAt(board, k)) return undefined;
-  const glued = board.terms[k]!.gap === false;
+  const glued = termAt(board, k).gap === false;
   const spacedT = word.text === 't' && !hyphen;
   if (!glued && !spacedT) return undefined;
   const tank = word.text === 't' || hasTag(board, i, 'vessel:tank');
@@ -102,7 +102,7 @@ function coded(board: Board, i: number): Named | undefined {
   if (word.text === 'x' || (hasOwnUnit(board, k) && !glued)) return undefined;
   if (glued && !hyphen && single && hasOwnUnit(board, k) && isMark(board, k + 1, '/')) return undefined;
   const { letter, to } = suffix(board, k);
-  const number = Number(board.terms[k]!.text);
+  const number = Number(termAt(board, k).text);
   const prefix = tank && !letter ? 'tank ' : barrel ? 'barrel ' : `${word.text.toUpperCase()}`;
   const name = tank && letter ? `T${number}${letter}` : `${prefix}${number}${letter}`;
   return { name, kind: prefix, ...(letter ? {} : { number }), from: i, to };
@@ -116,26 +116,26 @@ function rangeEnd(board: Board, first: Named): { number: number; to: number } | 
     isCue(board, k, 'to') ||
     isCue(board, k, 'joined') ||
     (isMark(board, k, '.') && isMark(board, k + 1, '.'));
-  const isMinus = isMark(board, k, '-') && board.terms[k]!.gap && board.terms[k + 1]?.gap === false;
+  const isMinus = isMark(board, k, '-') && termAt(board, k).gap && board.terms[k + 1]?.gap === false;
   if (!joins || isMinus || first.number === undefined) return undefined;
   const at = isMark(board, k, '.') ? k + 2 : k + 1;
   const second = worded(board, at) ?? (board.terms[at]?.kind === 'word' ? coded(board, at) : undefined);
   if (second?.number !== undefined && second.kind === first.kind)
     return { number: second.number, to: second.to };
-  const plural = /s$/.test(board.terms[first.from]!.text) || isMark(board, k, '-');
+  const plural = termAt(board, first.from).text.endsWith('s') || isMark(board, k, '-');
   if (
     plural &&
     isWholeAt(board, at) &&
     !hasOwnUnit(board, at) &&
-    (kindOf(board, first.from) !== undefined || board.terms[at]!.gap === false)
+    (kindOf(board, first.from) !== undefined || termAt(board, at).gap === false)
   ) {
-    return { number: Number(board.terms[at]!.text), to: at };
+    return { number: Number(termAt(board, at).text), to: at };
   }
   return undefined;
 }
 
 function findRange(board: Board, first: Named, last: { number: number; to: number }): void {
-  const from = first.number!;
+  const from = first.number ?? 0;
   if (last.number <= from || last.number - from > 499) {
     refuse(board, 'ambiguous-number', first.from, last.to);
     return;
@@ -156,7 +156,7 @@ function findRange(board: Board, first: Named, last: { number: number; to: numbe
 /** Finds the vessel: a tank or barrel word with its number, or a code; `B1-B24` is that many vessels. */
 export function findVessel(board: Board): void {
   for (let i = 0; i < board.terms.length; i++) {
-    if (board.taken[i] === true || board.terms[i]!.kind !== 'word') continue;
+    if (board.taken[i] === true || termAt(board, i).kind !== 'word') continue;
     const named = worded(board, i) ?? coded(board, i);
     if (!named) continue;
     const last = rangeEnd(board, named);

@@ -1,12 +1,23 @@
 import type { Board, Figure } from '../board.ts';
-import { figureAt, find, findingOf, hasTag, isCue, isFree, isMark, refuse, setAside } from '../board.ts';
+import {
+  figureAt,
+  find,
+  findingOf,
+  hasTag,
+  isCue,
+  isFree,
+  isMark,
+  refuse,
+  setAside,
+  termAt,
+} from '../board.ts';
 import { litresOf, noteUnit } from './barrels.ts';
 import type { UnitAt } from '../units.ts';
 import { VOLUME_UNITS, unitAt } from '../units.ts';
 
 /** A volume as it stands: `2.5k L`, `12 hl`, `3 m3`. */
 interface VolumeAt {
-  readonly litres: number;
+  readonly volume_L: number;
   readonly figure: Figure;
   readonly unit: UnitAt;
 }
@@ -15,11 +26,11 @@ function volumeAt(board: Board, i: number): VolumeAt | undefined {
   if (!isFree(board, i)) return undefined;
   const thousand =
     isCue(board, i + 1, 'thousand') &&
-    (board.terms[i + 1]!.gap === false || board.terms[i + 1]!.text !== 'k');
+    (termAt(board, i + 1).gap === false || termAt(board, i + 1).text !== 'k');
   const unit = unitAt(board, thousand ? i + 2 : i + 1, VOLUME_UNITS);
   if (!unit) return undefined;
   const figure = figureAt(board, i);
-  return { litres: figure.value * (thousand ? 1000 : 1) * litresOf(board, unit.id), figure, unit };
+  return { volume_L: figure.value * (thousand ? 1000 : 1) * litresOf(board, unit.id), figure, unit };
 }
 
 /** `6+6+4 gal`: the terms of a sum that one unit closes. */
@@ -28,7 +39,7 @@ function sumStart(board: Board, i: number): number {
   while (
     isMark(board, from - 1, '+') &&
     isFree(board, from - 2) &&
-    !(board.terms[from - 1]!.gap && !board.terms[from]!.gap)
+    !(termAt(board, from - 1).gap && !termAt(board, from).gap)
   )
     from -= 2;
   return from;
@@ -51,7 +62,7 @@ function bracketEnd(board: Board, i: number): number | undefined {
 const isRange = (board: Board, i: number): boolean =>
   (isMark(board, i - 1, '-') || isCue(board, i - 1, 'to') || isCue(board, i - 1, 'joined')) &&
   isFree(board, i - 2) &&
-  !(isMark(board, i - 1, '-') && board.terms[i - 1]!.gap);
+  !(isMark(board, i - 1, '-') && termAt(board, i - 1).gap);
 
 /** `60 hl/h` is a flow and no volume. */
 const isFlow = (board: Board, i: number): boolean =>
@@ -70,7 +81,7 @@ function findVolumeAt(board: Board, i: number): number {
     return volume.unit.to;
   }
   const start = sumStart(board, i);
-  const litres = start < i ? sumOf(board, start, i) * litresOf(board, volume.unit.id) : volume.litres;
+  const litres = start < i ? sumOf(board, start, i) * litresOf(board, volume.unit.id) : volume.volume_L;
   const bracket = bracketEnd(board, volume.unit.to + 1);
   if (isFlow(board, volume.unit.to + 1)) {
     setAside(board, i, volume.unit.to + 2);
@@ -88,8 +99,8 @@ function findVolumeAt(board: Board, i: number): number {
     board.notes.push({
       id: 'volume-sum',
       text: board.message.slice(
-        board.folded.at[board.terms[start]!.start],
-        board.folded.at[board.terms[to]!.end],
+        board.folded.at[termAt(board, start).start],
+        board.folded.at[termAt(board, to).end],
       ),
     });
   if (isCue(board, to + 1, 'each')) board.marks.statedEach = true;

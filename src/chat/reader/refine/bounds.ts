@@ -43,11 +43,10 @@ function problemOf({ field, value }: Finding): ProblemCode | undefined {
 
 /** Refuses what cannot be true: a pH of 36, a tank of 50 million litres. */
 export function settleBounds(board: Board): void {
-  for (let i = board.findings.length - 1; i >= 0; i--) {
-    const finding = board.findings[i]!;
+  for (const finding of board.findings.slice()) {
     const code = problemOf(finding);
     if (code === undefined) continue;
     board.problems.push({ code, about: placeOf(board, finding.from, finding.to).text });
-    board.findings.splice(i, 1);
+    board.findings.splice(board.findings.indexOf(finding), 1);
   }
 }

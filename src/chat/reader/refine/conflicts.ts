@@ -4,8 +4,8 @@ import { findingOf, placeOf } from '../board.ts';
 import type { FieldName } from '../understood.ts';
 
 const drop = (board: Board, fields: readonly FieldName[]): void => {
-  for (let i = board.findings.length - 1; i >= 0; i--)
-    if (fields.includes(board.findings[i]!.field)) board.findings.splice(i, 1);
+  const kept = board.findings.filter(({ field }) => !fields.includes(field));
+  board.findings.splice(0, board.findings.length, ...kept);
 };
 
 const key = (finding: Finding): string => JSON.stringify(finding.value);
@@ -47,9 +47,24 @@ function settleVessels(board: Board): void {
   drop(board, ['vessel', 'vessels']);
 }
 
+/** An allowance and a share that binds are two ways to say one thing: which of them holds? */
+function settleBinding(board: Board): void {
+  const [allowance, share] = [
+    findingOf(board, 'binding_allowance_percent'),
+    findingOf(board, 'binding_share'),
+  ];
+  if (!allowance || !share) return;
+  board.problems.push({
+    code: 'conflicting-values',
+    about: `${placeOf(board, allowance.from, allowance.to).text} / ${placeOf(board, share.from, share.to).text}`,
+  });
+  drop(board, ['binding_allowance_percent', 'binding_share']);
+}
+
 /** Settles findings that contradict each other: as problems, never by choosing. */
 export function settleConflicts(board: Board): void {
   settleTwice(board);
   settleTotal(board);
   settleVessels(board);
+  settleBinding(board);
 }

@@ -1,5 +1,5 @@
 import type { Board } from '../board.ts';
-import { holdsCue, isCue, isFound, isMark } from '../board.ts';
+import { findingOf, holdsCue, isCue, isFound, isMark, termAt } from '../board.ts';
 import type { Intent } from '../understood.ts';
 import { isCellarTalk } from './unlabelled.ts';
 
@@ -28,8 +28,7 @@ function isSolution(board: Board): boolean {
   if (solutionUse === 'cleaning')
     return hasVolume(board) || hasAdditive(board) || hasAmount(board) || any(board, 'strength_percent');
   const dissolved =
-    board.findings.some(({ field, value }) => field === 'additive' && String(value).endsWith('-solution')) ||
-    any(board, 'strength_percent');
+    findingOf(board, 'additive')?.value.endsWith('-solution') === true || any(board, 'strength_percent');
   const inWater = holdsCue(board, 'water');
   return dissolved
     ? !hasAmount(board) || inWater
@@ -88,7 +87,7 @@ function asksForDose(board: Board): boolean {
     board.terms.some(
       (_, i) =>
         isCue(board, i, 'in') &&
-        ['for', 'in', 'into', 'to'].includes(board.terms[i]!.text) &&
+        ['for', 'in', 'into', 'to'].includes(termAt(board, i).text) &&
         board.taken[i + 1] === true,
     );
   return hasAdditive(board) && hasVessel(board) && asked && !holdsCue(board, 'question');

@@ -10,6 +10,7 @@ import {
   placeOf,
   refuse,
   setAside,
+  termAt,
 } from '../board.ts';
 import { concentrationAt, mg_L_IN } from '../units.ts';
 
@@ -18,21 +19,21 @@ const MOST_UNLABELLED_FREE_mg_L = 60;
 
 const isPhLike = (board: Board, i: number): boolean => {
   const { value } = decimalAt(board, i);
-  return /^\d[.,']\d+$/.test(board.terms[i]!.text) && value >= 2.7 && value <= 4.5;
+  return /^\d[.,']\d+$/.test(termAt(board, i).text) && value >= 2.7 && value <= 4.5;
 };
 
 const isWhole = (board: Board, i: number): boolean =>
-  board.terms[i]!.value === undefined && /^\d+$/.test(board.terms[i]!.text);
+  termAt(board, i).value === undefined && /^\d+$/.test(termAt(board, i).text);
 
 /** Whether the figure ends or begins a range with a figure beside it: `18-20`. */
 function rangeEnd(board: Board, i: number): number | undefined {
   const joins =
-    (isMark(board, i + 1, '-') && board.terms[i + 1]!.gap === (board.terms[i + 2]?.gap ?? false)) ||
+    (isMark(board, i + 1, '-') && termAt(board, i + 1).gap === (board.terms[i + 2]?.gap ?? false)) ||
     isCue(board, i + 1, 'to');
   return joins &&
     isFree(board, i + 2) &&
     isPhLike(board, i) === isPhLike(board, i + 2) &&
-    !(isMark(board, i + 1, '-') && board.terms[i + 1]!.gap)
+    !(isMark(board, i + 1, '-') && termAt(board, i + 1).gap)
     ? i + 2
     : undefined;
 }
@@ -40,7 +41,7 @@ function rangeEnd(board: Board, i: number): number | undefined {
 /** `23 Chard`: the vintage, or free SO2? */
 function mayBeVintage(board: Board, i: number): boolean {
   const { value } = figureAt(board, i);
-  const beside = isCue(board, i + 1, 'variety') || (isCue(board, i - 1, 'variety') && board.terms[i]!.gap);
+  const beside = isCue(board, i + 1, 'variety') || (isCue(board, i - 1, 'variety') && termAt(board, i).gap);
   return beside && value >= 10 && value <= 30 && concentrationAt(board, i + 1) === undefined;
 }
 
@@ -53,7 +54,7 @@ const isAfterArticle = (board: Board, i: number): boolean =>
 
 /** `at 3.30` may be the clock. */
 const isTimeLike = (board: Board, i: number): boolean =>
-  /^\d\.[0-5]\d$/.test(board.terms[i]!.text) &&
+  /^\d\.[0-5]\d$/.test(termAt(board, i).text) &&
   ['at', 'by', 'until', 'till', 'from', 'since', 'before', 'after'].includes(board.terms[i - 1]?.text ?? '');
 
 function findPh(board: Board, candidates: readonly number[]): void {
@@ -89,7 +90,7 @@ function findFree(board: Board, candidates: readonly number[]): void {
   }
   if (left.length === 0) return;
   const only =
-    left.length === 1 || new Set(left.map((i) => figureAt(board, i).value)).size === 1 ? left[0]! : undefined;
+    left.length === 1 || new Set(left.map((i) => figureAt(board, i).value)).size === 1 ? left[0] : undefined;
   const isTaken = isFound(board, 'free_mg_L') || isFound(board, 'added_mg_L');
   const figure = only === undefined ? undefined : figureAt(board, only);
   const unit = only === undefined ? undefined : concentrationAt(board, only + 1);
@@ -101,7 +102,14 @@ function findFree(board: Board, candidates: readonly number[]): void {
     const to = unit?.to ?? only;
     if (unit?.id === 'ppm' || unit?.id === 'mg/L') board.marks.concentrationUnit ??= unit.id;
     board.notes.push({ id: 'free-unlabelled', text: placeOf(board, only, to).text });
-    return find(board, 'free_mg_L', figure.value * (unit ? mg_L_IN[unit.id]! : 1), 'bare', figure.from, to);
+    return find(
+      board,
+      'free_mg_L',
+      figure.value * (unit ? (mg_L_IN[unit.id] ?? 1) : 1),
+      'bare',
+      figure.from,
+      to,
+    );
   }
   for (const i of left)
     if (isFree(board, i))

@@ -1,0 +1,134 @@
+import type { Board, Figure } from '../board.ts';
+import { decimalAt, figureAt, hasTag, isCue, isFree, isMark, termAt } from '../board.ts';
+import type { LabelId } from '../words/words.ts';
+import { MASS_UNITS, VOLUME_UNITS, concentrationAt, unitAt } from '../units.ts';
+
+const LABELS: readonly LabelId[] = [
+  'ph',
+  'free',
+  'total',
+  'temperature',
+  'alcohol',
+  'sugar',
+  'aside',
+  'so2',
+  'volume',
+];
+
+/** The label at term `i`, when nothing has claimed it. */
+export const labelAt = (board: Board, i: number): LabelId | undefined =>
+  board.terms[i]?.kind === 'word' && board.taken[i] !== true
+    ? LABELS.find((one) => hasTag(board, i, `label:${one}`))
+    : undefined;
+
+/** A figure beside a label, with the terms between them that only join. */
+export interface Beside {
+  readonly at: number;
+  readonly to: number;
+}
+
+const isJoin = (board: Board, i: number): boolean => {
+  const term = board.terms[i];
+  if (term === undefined) return false;
+  if (term.kind === 'mark')
+    return (
+      term.text === ':' ||
+      term.text === '=' ||
+      term.text === '~' ||
+      (term.text === '-' && !(term.gap && board.terms[i + 1]?.gap === false))
+    );
+  return isCue(board, i, 'is') && labelAt(board, i) === undefined;
+};
+
+/** `free (ppm) 18`: the unit in brackets before the figure. */
+function skipBracket(board: Board, i: number): number {
+  if (!isMark(board, i, '(')) return i;
+  const unit = concentrationAt(board, i + 1);
+  return unit && isMark(board, unit.to + 1, ')') ? unit.to + 2 : i;
+}
+
+/** The end of the unit that belongs to the figure at `i`, as far as this label takes one. */
+function unitEnd(board: Board, i: number): number {
+  const conc = concentrationAt(board, i + 1);
+  if (conc) return conc.to;
+  let k = i + 1;
+  if (isMark(board, k, '%') || isMark(board, k, '°')) k++;
+  while (
+    k <= i + 3 &&
+    board.terms[k]?.gap !== true &&
+    (hasTag(board, k, 'unit:C') || hasTag(board, k, 'unit:F') || hasTag(board, k, 'unit:degree'))
+  )
+    k++;
+  if (
+    k === i + 1 &&
+    (hasTag(board, k, 'unit:C') || hasTag(board, k, 'unit:F') || hasTag(board, k, 'unit:degree'))
+  )
+    k++;
+  if (k > i + 1 && hasTag(board, k, 'label:volume') && isMark(board, k - 1, '%')) k++;
+  return k - 1;
+}
+
+/** The figure after a label, past a colon, "is", a unit in brackets. */
+export function figureAfter(board: Board, i: number): Beside | undefined {
+  let k = skipBracket(board, i + 1);
+  for (let joins = 0; joins < 3 && isJoin(board, k); joins++) k = skipBracket(board, k + 1);
+  if (isMark(board, k, '-') && isFree(board, k + 1) && !termAt(board, k + 1).gap) k++;
+  return isFree(board, k) ? { at: k, to: unitEnd(board, k) } : undefined;
+}
+
+/** The figure before a label, past its unit and "of". */
+export function figureBefore(board: Board, i: number): Beside | undefined {
+  let k = i - 1;
+  while (k > i - 3 && (isCue(board, k, 'of') || isCue(board, k, 'article'))) k--;
+  for (let at = k; at >= k - 4 && at >= 0; at--)
+    if (isFree(board, at)) return unitEnd(board, at) === k || at === k ? { at, to: k } : undefined;
+  return undefined;
+}
+
+/** Whether a figure is a volume or a mass, so that no label of SO2 or pH may take it. */
+export const hasForeignUnit = (board: Board, at: number): boolean =>
+  unitAt(board, at + 1, VOLUME_UNITS) !== undefined ||
+  (unitAt(board, at + 1, MASS_UNITS) !== undefined && concentrationAt(board, at + 1) === undefined);
+
+/** Whether a figure may be what the label says, so that its neighbour's figure is not taken for it. */
+function fits(label: LabelId, { value }: Figure): boolean {
+  if (label === 'ph') return value >= 2.5 && value <= 4.8;
+  if (label === 'alcohol') return value >= 0 && value <= 25;
+  const isPhLike = value >= 2.7 && value <= 4.5 && !Number.isInteger(value);
+  return !isPhLike && (label !== 'free' || value < 400);
+}
+
+/** The figure that a label names, before or after it: `18 free 60 total 3.5 pH` reads backwards, `pH 3.5 free 18` forwards. */
+export function figureBeside(board: Board, i: number, label: LabelId): Beside | undefined {
+  const [after, before] = [figureAfter(board, i), figureBefore(board, i)];
+  if (!after || hasForeignUnit(board, after.at)) return before ?? after;
+  if (!before || hasForeignUnit(board, before.at)) return after;
+  const figure = (one: Beside): Figure =>
+    label === 'ph' ? decimalAt(board, one.at) : figureAt(board, one.at);
+  if (fits(label, figure(after)) !== fits(label, figure(before)))
+    return fits(label, figure(after)) ? after : before;
+  const next = labelAt(board, after.to + 1);
+  if (next === undefined)
+    return board.terms[after.to + 1]?.kind === 'number' || !board.terms[before.at]?.gap
+      ? after
+      : isPrefixed(board, i)
+        ? after
+        : before;
+  return endsWithLabel(board, after.to + 1) ? before : after;
+}
+
+/** Whether an earlier label of this message already stood before its figure. */
+const isPrefixed = (board: Board, i: number): boolean =>
+  board.findings.some(({ said, from, to }) => said === 'labelled' && to < i && labelBefore(board, from));
+const labelBefore = (board: Board, from: number): boolean => board.terms[from]?.kind === 'word';
+
+/** Follows label, figure, label, figure … and says whether a label closes it. */
+function endsWithLabel(board: Board, i: number): boolean {
+  for (let k = i, hops = 0; hops < 8; hops++) {
+    const after = figureAfter(board, k);
+    if (!after || hasForeignUnit(board, after.at)) return true;
+    if (labelAt(board, after.to + 1) === undefined) return false;
+    k = after.to + 1;
+  }
+  return false;
+}
