@@ -1,19 +1,17 @@
 import { readFileSync, readdirSync } from 'node:fs';
-import { describe, expect, test } from 'vitest';
+import { expect, test } from 'vitest';
 import { fits, play, readScene } from './scene.ts';
 
-const files = readdirSync(import.meta.dirname).filter((name) => name.endsWith('.txt'));
+const scenes = readdirSync(import.meta.dirname)
+  .filter((name) => name.endsWith('.txt'))
+  .map((name) => ({ name, ...readScene(readFileSync(new URL(name, import.meta.url), 'utf8')) }));
 
-describe.each(files)('%s', (name) => {
-  const scene = readScene(readFileSync(new URL(name, import.meta.url), 'utf8'));
-
-  test(scene.title, async () => {
-    const answers = await play(scene);
-    for (const [at, { us }] of scene.moves.entries()) {
-      const actual = answers[at] ?? [];
-      expect(fits(us, actual) ? us : actual).toEqual(us);
-    }
-  });
+test.each(scenes)('$name: $title', async (scene) => {
+  const answers = await play(scene);
+  for (const [at, { us }] of scene.moves.entries()) {
+    const actual = answers[at] ?? [];
+    expect(fits(us, actual) ? us : actual).toEqual(us);
+  }
 });
 
 test('a scene that says another figure than we do is found', () => {

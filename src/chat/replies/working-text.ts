@@ -1,14 +1,15 @@
-import type { Quantity } from '../../core/working.ts';
+import { plainText, type Quantity } from '../../core/working.ts';
 import { numberText, type DecimalMark } from './number-text.ts';
-
-/** Digits of a number that the working keeps behind the decimal mark; no line of it has more. */
-const MOST_DECIMALS = 10;
 
 /** How the working's units are written for people. */
 const UNIT_TEXT: Readonly<Record<string, string>> = { galUS: 'gal', galUK: 'imp gal' };
 
+/** Every digit stays as it was reckoned with: only the mark and the grouping change. */
 function withMark(text: string, mark: DecimalMark): string {
-  return text.replace(/\d+(?:\.\d+)?/g, (digits) => numberText(Number(digits), MOST_DECIMALS, mark));
+  return text.replace(/(\d+)(?:\.(\d+))?/g, (_, whole: string, broken?: string) => {
+    const grouped = numberText(Number(whole), 0, mark);
+    return broken === undefined ? grouped : grouped + mark + broken;
+  });
 }
 
 /**
@@ -55,6 +56,6 @@ export function shortExpression(expression: string, unit: string): string {
  * ```
  */
 export function resultText({ value, unit }: Quantity, mark: DecimalMark): string {
-  const number = numberText(value, MOST_DECIMALS, mark);
+  const number = withMark(plainText(value), mark);
   return unit === '' ? number : `${number} ${UNIT_TEXT[unit] ?? unit}`;
 }

@@ -1,0 +1,122 @@
+import { describe, expect, test } from 'vitest';
+import { startTalk, textOf } from './talk.ts';
+
+const MINUTE_ms = 60_000;
+const fieldsAfter = (...messages: readonly string[]): unknown => {
+  const talk = startTalk();
+  return messages.map((text) => talk.write(text)).at(-1)?.understood?.readings[0]?.fields;
+};
+
+describe('a message completes the reading that waits', () => {
+  test.each([
+    [['T4 pH 3.5 free 20', '40 hl'], { vessel: 'tank 4', ph: 3.5, free_mg_L: 20, volume_L: 4000 }],
+    [['T4 40 hl pH 3.5', '18'], { vessel: 'tank 4', ph: 3.5, free_mg_L: 18, volume_L: 4000 }],
+    [
+      ['T4 40 hl pH 3.5', 'free 18 total 60'],
+      { vessel: 'tank 4', ph: 3.5, free_mg_L: 18, total_mg_L: 60, volume_L: 4000 },
+    ],
+    [
+      ['T4 40 hl free 18', 'pH 3.5 red'],
+      { vessel: 'tank 4', ph: 3.5, free_mg_L: 18, volume_L: 4000, style: 'red' },
+    ],
+    [['pH 3.5 free 20', 'T4 40 hl'], { vessel: 'tank 4', ph: 3.5, free_mg_L: 20, volume_L: 4000 }],
+    [['T4 40 hl pH 3.5', 'T4 free 18'], { vessel: 'tank 4', ph: 3.5, free_mg_L: 18, volume_L: 4000 }],
+    [
+      ['100 g kmbs T4', '20 hl'],
+      { vessel: 'tank 4', additive: 'potassium-metabisulfite', mass_g: 100, volume_L: 2000 },
+    ],
+    [['added kmbs to tank 6', '82 g'], { vessel: 'tank 6', additive: 'potassium-metabisulfite', mass_g: 82 }],
+  ])('%j', (messages, fields) => {
+    expect(fieldsAfter(...messages)).toEqual(fields);
+  });
+});
+
+describe('a message starts a new reading', () => {
+  test.each([
+    ['another vessel', ['T4 pH 3.5 free 20', 'T5 40 hl'], { vessel: 'tank 5', volume_L: 4000 }],
+    ['a value that contradicts', ['T4 pH 3.5 free 20', 'pH 3.6 40 hl'], { ph: 3.6, volume_L: 4000 }],
+    [
+      'another intent',
+      ['T4 pH 3.5 free 20', 'added 82 g kmbs T4'],
+      { vessel: 'tank 4', additive: 'potassium-metabisulfite', mass_g: 82 },
+    ],
+  ])('with %s', (_, messages, fields) => {
+    expect(fieldsAfter(...messages)).toEqual(fields);
+  });
+});
+
+test.each([
+  [30, true],
+  [31, false],
+])('a question waits half an hour: after %i minutes a volume alone completes: %s', (minutes, completes) => {
+  const talk = startTalk();
+  talk.write('T4 pH 3.5 free 20');
+  talk.at += minutes * MINUTE_ms;
+  expect(/weigh/.test(textOf(talk.write('40 hl')))).toBe(completes);
+});
+
+test('one question stands in a reply, for the first field that is missing', () => {
+  const talk = startTalk();
+  expect(textOf(talk.write('free 21 ppm')).match(/\?/g)).toHaveLength(1);
+  expect(talk.memory.waiting?.field).toBe('volume_L');
+});
+
+test('a slip in an answer leaves the question waiting', () => {
+  const talk = startTalk();
+  talk.write('T4 40 hl free 20');
+  talk.write('36');
+  expect(talk.memory.waiting?.field).toBe('ph');
+  expect(textOf(talk.write('3.5'))).toContain('T4: weigh');
+});
+
+test('a total below the free that comes later is a problem, not a dose', () => {
+  const talk = startTalk();
+  talk.write('T4 40 hl pH 3.5 total 15');
+  const { understood, answers } = talk.write('20');
+  expect(understood?.readings[0]?.problems[0]?.code).toBe('total-below-free');
+  expect(answers).toEqual([null]);
+});
+
+describe('a number that nothing asks for', () => {
+  test.each(['T7 20 hl pH 3.6 free 3, in ML', 'T3 3000 L must pH 3.4', 'T4 20 hl still fermenting'])(
+    'is asked about after: %s',
+    (message) => {
+      const talk = startTalk();
+      talk.write(message);
+      expect(talk.memory.waiting).toBeUndefined();
+      const { understood, answers } = talk.write('30');
+      expect(understood?.readings[0]).toMatchObject({
+        fields: {},
+        problems: [{ code: 'ambiguous-number', about: '30' }],
+      });
+      expect(answers).toEqual([null]);
+    },
+  );
+
+  test('presses a button where buttons stand, and never while a field waits', () => {
+    const talk = startTalk();
+    talk.write('T4 1450 gal pH 3.4 free 21');
+    expect(textOf(talk.write('2'))).toContain('the working');
+    talk.write('T4 pH 3.5 free 20');
+    expect(talk.write('2').understood?.readings[0]?.fields.volume_L).toBe(2);
+  });
+});
+
+test('letters choose while their field waits, small or capital', () => {
+  for (const letter of ['b', 'B', ' b ']) {
+    const talk = startTalk();
+    talk.write('2 campden in 10 L');
+    expect(talk.write(letter).understood?.readings[0]?.fields.additive).toBe('sodium-metabisulfite');
+  }
+});
+
+test('a letter is no choice where none waits', () => {
+  expect(startTalk().write('b').understood?.readings[0]?.fields).toEqual({});
+});
+
+test('another target is asked for and waits, without the one before', () => {
+  const talk = startTalk();
+  talk.write('T4 40 hl pH 3.5 free 20 target 35');
+  talk.press('t:1');
+  expect(talk.write('40').understood?.readings[0]?.fields.target).toEqual({ free_mg_L: 40 });
+});

@@ -1,0 +1,46 @@
+import { expect, test } from 'vitest';
+import { readOptions } from '../../../src/edge/ask/options.ts';
+import { OperatorError } from '../../../src/edge/operator-error.ts';
+
+test('a message stands on the command line, in one piece or several', () => {
+  expect(readOptions(['T4 40 hl pH 3.4', 'free 15'])).toMatchObject({
+    jsonl: false,
+    text: 'T4 40 hl pH 3.4 free 15',
+  });
+});
+
+test.each([
+  [['--language', 'es'], { language: 'es' }],
+  [['--basis', 'oiv'], { basis: 'oiv' }],
+  [['--additive', 'sodium-metabisulfite'], { usualAdditive: 'sodium-metabisulfite' }],
+  [['--units', 'us'], { volumeUnit: 'galUS', gallon: 'US', temperatureUnit: 'F' }],
+  [['--units=imperial'], { volumeUnit: 'galUK', gallon: 'imperial' }],
+  [[], { language: 'en', basis: 'pk-1.81', usualAdditive: 'potassium-metabisulfite', volumeUnit: 'L' }],
+])('options become settings: %j', (options, settings) => {
+  expect(readOptions(['--jsonl', ...options]).settings).toMatchObject(settings);
+});
+
+test('options that cannot be served yet are accepted and named', () => {
+  expect(readOptions(['--region', 'eu', '--data', 'cellar.db', 'hi']).notServedYet).toEqual([
+    '--region',
+    '--data',
+  ]);
+  expect(readOptions(['--data', 'cellar.db', '--log']).notServedYet).toEqual(['--data', '--log']);
+});
+
+test.each([
+  [['--colour', 'hi']],
+  [['--language', 'xx', 'hi']],
+  [['--basis', 'mine', 'hi']],
+  [['--additive', 'sulfur-dioxide-solution', 'hi']],
+  [['--units', 'cups', 'hi']],
+  [['--language']],
+  [[]],
+  [['--jsonl', 'hi']],
+])('what there is not is refused with a sentence: %j', (args) => {
+  expect(() => readOptions(args)).toThrow(OperatorError);
+});
+
+test('a dash in front of a message is no option after two of them', () => {
+  expect(readOptions(['--', '-5 free']).text).toBe('-5 free');
+});

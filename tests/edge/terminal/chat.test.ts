@@ -1,0 +1,105 @@
+import { PassThrough } from 'node:stream';
+import { expect, test } from 'vitest';
+import { handle } from '../../../src/chat/conversation/conversation.ts';
+import { DEFAULT_SETTINGS } from '../../../src/chat/conversation/settings.ts';
+import { makeSay } from '../../../src/chat/replies/say.ts';
+import { loadLocales } from '../../../src/edge/locales.ts';
+import { createMemoryStore } from '../../../src/edge/store/memory.ts';
+import { runTerminal } from '../../../src/edge/terminal/chat.ts';
+
+const say = makeSay(loadLocales());
+const NOON = Date.parse('2026-10-05T12:00:00Z');
+
+interface Typed {
+  readonly interactive?: boolean;
+  /** Written one after the other, with a pause between them that is longer than any paste. */
+  readonly pieces: readonly string[];
+}
+
+async function chat({ interactive = false, pieces }: Typed): Promise<string> {
+  const input = new PassThrough();
+  const output = new PassThrough({ encoding: 'utf8' });
+  const ended = runTerminal({
+    handle: (message, memory) => handle(message, memory, DEFAULT_SETTINGS),
+    say,
+    state: createMemoryStore(),
+    input,
+    output,
+    now: () => NOON,
+    language: 'en',
+    interactive,
+  });
+  for (const [at, piece] of pieces.entries()) {
+    if (at > 0) await new Promise((resolve) => setTimeout(resolve, interactive ? 80 : 400));
+    input.write(piece);
+  }
+  input.end();
+  await ended;
+  output.end();
+  let text = '';
+  for await (const chunk of output) text += String(chunk);
+  return text.replaceAll('\u202f', ' ');
+}
+
+test('a line through a pipe prints its answer and ends, without greeting or prompt', async () => {
+  const text = await chat({ pieces: ['T4 1450 gal pH 3.58 free 21\n'] });
+  expect(text).toMatch(/^T4: weigh 256 g potassium metabisulfite\n/);
+  expect(text).not.toContain('> ');
+});
+
+test('a last line without an end is answered too', async () => {
+  expect(await chat({ pieces: ['T4 1450 gal pH 3.58 free 21'] })).toContain('256 g');
+});
+
+test('lines that arrive together are one message: a round', async () => {
+  const text = await chat({ pieces: ['T1 20 hl pH 3.4 free 15\nT2 30 hl pH 3.4 free 15\n'] });
+  expect(text.match(/weigh/g)).toHaveLength(2);
+  expect(text.match(/never lean into a tank/g)).toHaveLength(1);
+});
+
+test('a blank line ends a message', async () => {
+  const text = await chat({ pieces: ['T4 pH 3.5 free 20\n\n40 hl\n\n'] });
+  expect(text).toContain('what volume?');
+  expect(text).toContain('T4: weigh 139 g');
+});
+
+test('lines with a pause between them are a message each', async () => {
+  const text = await chat({ pieces: ['T4 pH 3.5 free 20\n', '40 hl\n'] });
+  expect(text).toContain('what volume?');
+  expect(text).toContain('T4: weigh 139 g');
+});
+
+test('buttons stand under the answer with their numbers, and a number presses one', async () => {
+  const text = await chat({ pieces: ['T4 40 hl pH 3.4 free 15\n\n2\n'] });
+  expect(text).toContain('[1 Not finished  2 Working  3 Another target  4 More]');
+  expect(text).toContain('T4: the working');
+});
+
+test('a person is greeted and told how to begin, and the end of the input is a clean end', async () => {
+  const text = await chat({ interactive: true, pieces: ['hi\n', '?\n'] });
+  expect(text).toMatch(/^Brimnote reckons SO2 additions/);
+  expect(text.match(/^> /gm)).toHaveLength(3);
+  expect(text.endsWith('> \n')).toBe(true);
+});
+
+test('nothing but blank lines is no message', async () => {
+  expect(await chat({ pieces: ['\n\n  \n'] })).toBe('');
+});
+
+test('the chat ends when it is told to', async () => {
+  const stop = new AbortController();
+  const input = new PassThrough();
+  const ended = runTerminal({
+    handle: (message, memory) => handle(message, memory, DEFAULT_SETTINGS),
+    say,
+    state: createMemoryStore(),
+    input,
+    output: new PassThrough(),
+    now: () => NOON,
+    language: 'en',
+    interactive: false,
+    signal: stop.signal,
+  });
+  stop.abort();
+  await expect(ended).resolves.toBeUndefined();
+});
