@@ -2,6 +2,7 @@ import type { DoseChoice } from '../../core/dose/answer.ts';
 import type { AskedField, Fields } from '../reader/understood.ts';
 import { numberText, type DecimalMark } from '../replies/number-text.ts';
 import type { Button, Line } from '../replies/reply.ts';
+import type { SentenceKey } from '../replies/sentence-keys.ts';
 import { perLitre, type Manner } from './manner.ts';
 import { letterAt } from './waiting.ts';
 
@@ -19,7 +20,7 @@ export const LABELS = {
   s: 'button-safety',
   t: 'button-target',
   m: 'button-more',
-} as const satisfies Partial<Record<Does, string>>;
+} as const satisfies Partial<Record<Does, SentenceKey>>;
 
 /** The plain buttons of a remembered reading, marked 1, 2, 3 … as they stand. */
 export function buttonsFor(number: number, does: readonly (keyof typeof LABELS)[]): Button[] {

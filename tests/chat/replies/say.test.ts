@@ -4,8 +4,12 @@ import type { Line } from '../../../src/chat/replies/reply.ts';
 import { loadLocales } from '../../../src/edge/locales.ts';
 
 /** A line of sentences that are made up here. */
-const line = (key: string, values: Line['values'] = {}, more: Partial<Line> = {}): Line =>
-  ({ room: 'first', key, values, ...more }) as Line;
+const line = (key: string, values: Line['values'] = {}, more: Partial<Line> = {}): Line => ({
+  room: 'first',
+  key,
+  values,
+  ...more,
+});
 const saying = (en: string, ...lines: Line[]): string =>
   makeSay({ en })({ language: 'en', lines, buttons: [] }).text;
 

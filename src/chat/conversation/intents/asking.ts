@@ -2,7 +2,7 @@ import type { AskedField, Reading } from '../../reader/understood.ts';
 import type { DecimalMark } from '../../replies/number-text.ts';
 import type { Button, Line } from '../../replies/reply.ts';
 import { letterButtons } from '../buttons.ts';
-import { line, part } from '../lines/line.ts';
+import { line } from '../lines/line.ts';
 import { questionLine } from '../lines/question.ts';
 import type { Turn } from '../outcome.ts';
 import type { Settings } from '../settings.ts';
@@ -25,7 +25,7 @@ export function questionFor(
   const buttons = letterButtons(number, field, choicesFor(field, reading, settings), mark);
   const options = buttons.map(({ mark: letter, label, values }) => ({
     ...line(room, 'option', { mark: letter }),
-    list: [part(label, values)],
+    list: [{ key: label, values }],
   }));
   return { question: [questionLine(field, reading, settings, room), ...options], buttons };
 }

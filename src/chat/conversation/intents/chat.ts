@@ -1,4 +1,5 @@
 import type { Reading } from '../../reader/understood.ts';
+import type { SentenceKey } from '../../replies/sentence-keys.ts';
 import { line } from '../lines/line.ts';
 import { noteText } from '../lines/notes.ts';
 import type { Outcome } from '../outcome.ts';
@@ -16,7 +17,7 @@ const HELP = [
 ] as const;
 
 /** The sentences for a matter of the chat; the readers of other words get how to begin. */
-function keysFor(reading: Reading): readonly string[] {
+function keysFor(reading: Reading): readonly SentenceKey[] {
   if (noteText(reading, 'negated') !== undefined) return ['chat-negated'];
   if (reading.intent !== 'chat') return ['not-served'];
   if (reading.topic === 'help') return HELP;

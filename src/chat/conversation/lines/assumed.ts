@@ -1,6 +1,7 @@
 import type { Reading } from '../../reader/understood.ts';
 import type { Line } from '../../replies/reply.ts';
 import { volumeText } from '../../replies/volume-text.ts';
+import type { SentenceKey } from '../../replies/sentence-keys.ts';
 import type { Manner } from '../manner.ts';
 import { listLine, part } from './line.ts';
 import { noteParts } from './notes.ts';
@@ -31,7 +32,7 @@ function filledIn({ assumed, fields, asks }: Reading, manner: Manner, weighs: bo
   return parts;
 }
 
-function targetKey(fields: Reading['fields']): string {
+function targetKey(fields: Reading['fields']): SentenceKey {
   if (fields.category === 'sweet') return 'assumed-target-sweet';
   return fields.style === 'red' ? 'assumed-target-red' : 'assumed-target';
 }

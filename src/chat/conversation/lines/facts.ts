@@ -2,6 +2,7 @@ import type { Fields, Reading } from '../../reader/understood.ts';
 import type { Line } from '../../replies/reply.ts';
 import { numberText } from '../../replies/number-text.ts';
 import { volumeText } from '../../replies/volume-text.ts';
+import type { SentenceKey } from '../../replies/sentence-keys.ts';
 import type { Manner } from '../manner.ts';
 import { countOf } from '../to-requests.ts';
 import { listLine, part } from './line.ts';
@@ -19,7 +20,7 @@ export function factsOf(reading: Reading, manner: Manner): Part[] {
   const { fields } = reading;
   const said = (value: number): string => numberText(value, 2, manner.mark);
   const figures: Part[] = [];
-  const figure = (name: keyof Fields, key: string, as: (value: number) => Line['values']): void => {
+  const figure = (name: keyof Fields, key: SentenceKey, as: (value: number) => Line['values']): void => {
     const value = fields[name];
     if (typeof value === 'number') figures.push(part(key, as(value)));
   };

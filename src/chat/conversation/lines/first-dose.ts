@@ -4,11 +4,12 @@ import type { DoseAnswer, Measure } from '../../../core/dose/answer.ts';
 import type { Line } from '../../replies/reply.ts';
 import { concentrationText, measureText } from '../../replies/quantity-text.ts';
 import { numberText } from '../../replies/number-text.ts';
+import type { SentenceKey } from '../../replies/sentence-keys.ts';
 import type { Manner } from '../manner.ts';
 import { line } from './line.ts';
 
 /** The sentence that tells how to measure an additive. */
-function sentenceFor(additive: AdditiveAtHand, measure: Measure): string {
+function sentenceFor(additive: AdditiveAtHand, measure: Measure): SentenceKey {
   if (measure.unit === 'tablets')
     return additive.tablet_salt_g === undefined ? 'dose-tablets' : 'dose-tablets-salt';
   const { kind } = ADDITIVES[additive.id];

@@ -6,7 +6,7 @@ import type { Manner } from '../manner.ts';
 import { part } from './line.ts';
 
 /** The notes that say how something was read; the others have a place of their own in the reply. */
-const AMONG_THE_ASSUMED: readonly ReadNote['id'][] = [
+const AMONG_THE_ASSUMED = [
   'free-unlabelled',
   'ph-unlabelled',
   'volume-sum',
@@ -14,7 +14,7 @@ const AMONG_THE_ASSUMED: readonly ReadNote['id'][] = [
   'strength-as-SO2',
   'mass-beside-readings',
   'each-or-total',
-];
+] as const satisfies readonly ReadNote['id'][];
 
 /** How many times as much SO2 the strength would be, were it of SO2 and not of the salt. */
 function saltFactor(reading: Reading, { mark }: Manner): string {
@@ -24,9 +24,11 @@ function saltFactor(reading: Reading, { mark }: Manner): string {
 
 /** How something was read that could be read otherwise, as parts of the list of assumptions. */
 export function noteParts(reading: Reading, manner: Manner): Omit<Line, 'room'>[] {
-  return reading.notes
-    .filter(({ id }) => AMONG_THE_ASSUMED.includes(id))
-    .filter(({ id }) => !(id === 'each-or-total' && reading.asks.includes('volume_L')))
+  const told = AMONG_THE_ASSUMED.filter(
+    (id) => !(id === 'each-or-total' && reading.asks.includes('volume_L')),
+  );
+  return told
+    .flatMap((id) => reading.notes.flatMap((note) => (note.id === id ? [{ id, text: note.text }] : [])))
     .map(({ id, text }) => part(`note-${id}`, { text, factor: saltFactor(reading, manner) }));
 }
 

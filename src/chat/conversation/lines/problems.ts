@@ -7,7 +7,7 @@ import { noteText } from './notes.ts';
 export function problemLines(reading: Reading, vessel: string): Line[] {
   const lines = reading.problems.map(({ code, about }) => {
     const suggested = code === 'unknown-additive' && noteText(reading, 'did-you-mean') !== undefined;
-    const key = suggested ? 'problem-did-you-mean' : `problem-${code}`;
+    const key = suggested ? ('problem-did-you-mean' as const) : (`problem-${code}` as const);
     return line('first', key, { vessel, about: shortened(about), kind: kindOf(about) });
   });
   const only = reading.problems.every(({ code }) => code === 'not-understood' || code === 'too-long');

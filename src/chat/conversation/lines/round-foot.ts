@@ -44,7 +44,7 @@ function mergeLists(lines: readonly Line[]): Line[] {
   const byKey = Map.groupBy(lines, ({ key }) => key);
   return [...byKey.entries()].flatMap(([key, alike]) => {
     const parts = mergeParts(alike.flatMap(({ list }) => list ?? []));
-    return parts.length === 0 ? [] : [{ ...line('assumed', key), list: parts }];
+    return parts.length === 0 ? [] : [{ room: 'assumed' as const, key, values: {}, list: parts }];
   });
 }
 

@@ -9,14 +9,21 @@ import { line } from './line.ts';
 const MOST = 3;
 
 /** Said elsewhere in the reply, in a place of their own. */
-const SAID_ELSEWHERE: readonly WarningCode[] = [
+const SAID_ELSEWHERE = [
   'stage-assumed',
   'style-unknown',
   'no-addition-needed',
   'gas-needs-training',
   'allowance-covers-less',
   'does-not-stop-fermentation',
-];
+] as const satisfies readonly WarningCode[];
+
+/** A warning that has a sentence of its own. */
+type Told = Warning & { readonly code: Exclude<WarningCode, (typeof SAID_ELSEWHERE)[number]> };
+
+function isTold(warning: Warning): warning is Told {
+  return SAID_ELSEWHERE.every((code) => code !== warning.code);
+}
 
 /** No limit is spoken of unless it is passed or near. */
 const ONLY_BEHIND_MORE: readonly WarningCode[] = ['no-limit-on-file', 'limit-unconfirmed'];
@@ -36,7 +43,8 @@ export function warningLines(
   besides: readonly WarningCode[] = [],
 ): Line[] {
   return warnings
-    .filter(({ code }) => ![...SAID_ELSEWHERE, ...ONLY_BEHIND_MORE, ...besides].includes(code))
+    .filter(isTold)
+    .filter(({ code }) => ![...ONLY_BEHIND_MORE, ...besides].includes(code))
     .filter(totalMatters)
     .filter(({ values }) => values['measure_gives_mg_L'] === undefined) // the tablets' own line says so
     .slice(0, MOST)
@@ -45,15 +53,13 @@ export function warningLines(
 
 /** All warnings that have no place of their own, for the button `More`. */
 export function allWarningLines(warnings: readonly Warning[], manner: Manner): Line[] {
-  return warnings
-    .filter(({ code }) => !SAID_ELSEWHERE.includes(code))
-    .map((warning) => warningLine(warning, manner, 'first'));
+  return warnings.filter(isTold).map((warning) => warningLine(warning, manner, 'first'));
 }
 
-function warningLine({ code, values }: Warning, manner: Manner, room: Line['room']): Line {
+function warningLine({ code, values }: Told, manner: Manner, room: Line['room']): Line {
   const texts = Object.entries(values).map(([name, value]) => [name, textOf(name, value, manner)] as const);
-  const change = values['need_change_mg_L'] === undefined ? '' : '-change';
-  return line(room, `warning-${code}${code === 'basis-fallback' ? change : ''}`, {
+  const tellsChange = code === 'basis-fallback' && values['need_change_mg_L'] !== undefined;
+  return line(room, tellsChange ? 'warning-basis-fallback-change' : `warning-${code}`, {
     unit: manner.unit,
     ...Object.fromEntries<string>(texts),
   });
