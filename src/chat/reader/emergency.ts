@@ -61,7 +61,11 @@ function hitsByLanguage(words: readonly string[]): Map<Language, Map<DangerId, H
     for (const { language, words: phrase, id } of INDEX.get(words[i] ?? '') ?? []) {
       if (!phrase.every((word, k) => words[i + k] === word)) continue;
       const hits = found.get(language) ?? new Map<DangerId, Hit[]>();
-      found.set(language, hits.set(id, [...(hits.get(id) ?? []), { from: i, to: i + phrase.length - 1 }]));
+      const hit = { from: i, to: i + phrase.length - 1 };
+      const same = hits.get(id);
+      if (same) same.push(hit);
+      else hits.set(id, [hit]);
+      found.set(language, hits);
     }
   }
   return found;

@@ -126,12 +126,30 @@ function noteCask(board: Board): void {
     board.marks.castsWithoutSize = true;
 }
 
+/** More figures than one reading can hold; own threshold, so that no text takes long. */
+const MOST_FIGURES = 100;
+
+const holdsTooMany = ({ terms }: Board): boolean =>
+  terms.length > MOST_FIGURES && terms.filter(({ kind }) => kind === 'number').length > MOST_FIGURES;
+
+/** Nobody can tell which of so many figures is which. */
+const tooManyFigures = (board: Board): Draft => ({
+  intent: 'dose',
+  fields: {},
+  problems: [{ code: 'ambiguous-number', about: placeOf(board, 0, 5).text }],
+  setAside: [],
+  notes: [],
+  marks: {},
+  where: {},
+});
+
 /**
  * Runs every finder and refiner over a board, and says what the message wants.
  *
  * @param board The table with the terms of one line or message; it is written on.
  */
 export function readDraft(board: Board): Draft {
+  if (holdsTooMany(board)) return tooManyFigures(board);
   for (const find of FINDERS) find(board);
   noteCask(board);
   assumeBarrel(board);

@@ -12,7 +12,8 @@ interface LineRead {
   readonly draft: Draft;
   readonly vessel: string | undefined;
   readonly hasVolume: boolean;
-  readonly isPastWord: boolean;
+  /** It says that something was added: as the first line, of all lines. */
+  readonly isPast: boolean;
   /** Figures in it that nothing could read. */
   readonly leftover: boolean;
 }
@@ -38,7 +39,7 @@ function readLine(terms: readonly Term[], setBoard: SetBoard): LineRead {
       says('volume_L') ||
       board.marks.barrelsCounted === true ||
       board.problems.some(({ code }) => code === 'volume-not-positive'),
-    isPastWord: board.pastTense && draft.intent === 'chat',
+    isPast: board.pastTense,
     leftover: draft.intent === 'chat' && terms.some((_, i) => isFree(board, i)),
   };
 }
@@ -63,15 +64,38 @@ const NOT_UNDERSTOOD: Draft = {
 const carriesFacts = ({ draft }: LineRead): boolean =>
   Object.keys(draft.fields).length > 0 || Object.keys(draft.marks).length > 0;
 
-/** Facts of the first line: what a reading does not say itself it takes from here. */
+/** A line takes from the first what it does not say itself: its facts, and the wish to note a reading. */
 function withShared(draft: Draft, shared: Draft | undefined): Draft {
-  if (!shared) return draft;
-  return { ...draft, marks: { ...shared.marks, ...draft.marks } };
+  const intent =
+    draft.intent === 'chat' || (draft.intent === 'dose' && shared?.intent === 'reading')
+      ? shared?.intent === 'reading'
+        ? 'reading'
+        : 'dose'
+      : draft.intent;
+  return { ...draft, intent, marks: { ...shared?.marks, ...draft.marks } };
 }
 
-function assumePast(board: Board): Board {
-  board.marks.pastLine = true;
-  return board;
+/** The lines of each reading: one that opens it and those below; an empty one for figures nobody can read. */
+function groupsOf(lines: readonly LineRead[], opens: (line: LineRead) => boolean): LineRead[][] {
+  const groups: LineRead[][] = [];
+  for (const [i, line] of lines.entries()) {
+    const last = groups.at(-1);
+    if (opens(line)) groups.push([line]);
+    else if (i > 0 && line.draft.intent !== 'chat' && last && last.length > 0) last.push(line);
+    else if (i > 0 && line.leftover) groups.push([]);
+  }
+  return groups;
+}
+
+/** Reads the lines of one vessel as one message. */
+function readTogether(group: readonly LineRead[], setBoard: SetBoard, isPast: boolean): Draft {
+  const board = setBoard(
+    group.flatMap(({ terms }, i): readonly Term[] =>
+      i === 0 ? terms : [{ ...termIn(terms, 0), kind: 'break', text: '\n', tags: [] }, ...terms],
+    ),
+  );
+  if (isPast) board.marks.pastLine = true;
+  return readDraft(board);
 }
 
 /**
@@ -91,35 +115,14 @@ export function readRound(
   const byVessel = read.filter(({ vessel }) => vessel !== undefined).length >= 2;
   const opens = (line: LineRead): boolean => (byVessel ? line.vessel !== undefined : line.hasVolume);
   const [first] = read as [LineRead];
-  const past = first.isPastWord && !opens(first);
-  const shared =
-    !opens(first) && !first.isPastWord && carriesFacts(first) && first.draft.problems.length === 0
-      ? first.draft
-      : undefined;
-  const groups: (Term[] | undefined)[] = [];
-  for (const line of read) {
-    if (opens(line)) groups.push([...line.terms]);
-    else if (line === first) continue;
-    else if (line.draft.intent !== 'chat' && groups.at(-1))
-      groups.at(-1)?.push({ ...termIn(line.terms, 0), kind: 'break', text: '\n', tags: [] }, ...line.terms);
-    else if (line.leftover) groups.push(undefined);
-  }
-  const readings = groups.map((terms) => {
-    if (!terms) return { ...NOT_UNDERSTOOD, assumed: {}, asks: [] };
-    const board = setBoard(terms);
-    const draft = withShared(readDraft(past ? assumePast(board) : board), shared);
-    const dose =
-      draft.intent === 'chat'
-        ? { ...draft, intent: 'dose' as const, ...(board.findings.length > 0 ? {} : {}) }
-        : draft;
-    return finishReading(withIntent(dose, shared), settings, shared?.fields);
+  const isPast = first.isPast && !opens(first);
+  const isShared = !opens(first) && carriesFacts(first) && first.draft.problems.length === 0;
+  const shared = isShared ? first.draft : undefined;
+  const readings = groupsOf(read, opens).map((group): Reading => {
+    const [line] = group;
+    if (!line) return { ...NOT_UNDERSTOOD, assumed: {}, asks: [] };
+    const draft = group.length === 1 && !isPast ? line.draft : readTogether(group, setBoard, isPast);
+    return finishReading(withShared(draft, shared), settings, shared?.fields);
   });
   return { readings, shared: shared?.fields ?? {} };
-}
-
-/** A line that names only a vessel takes the wish of the first line. */
-function withIntent(draft: Draft, shared: Draft | undefined): Draft {
-  return shared && (shared.intent === 'reading' || shared.intent === 'added') && draft.intent === 'dose'
-    ? { ...draft, intent: shared.intent }
-    : draft;
 }

@@ -13,8 +13,11 @@ const key = (finding: Finding): string => JSON.stringify(finding.value);
 /** The same field twice with different values: named both times it is a conflict, bare it is unclear. */
 function settleTwice(board: Board): void {
   const byField = new Map<FieldName, Finding[]>();
-  for (const finding of board.findings)
-    byField.set(finding.field, [...(byField.get(finding.field) ?? []), finding]);
+  for (const finding of board.findings) {
+    const same = byField.get(finding.field);
+    if (same) same.push(finding);
+    else byField.set(finding.field, [finding]);
+  }
   for (const [field, findings] of byField) {
     if (findings.length < 2 || new Set(findings.map(key)).size === 1 || field === 'stage') continue;
     const code: ProblemCode = findings.some(({ said }) => said === 'bare')
