@@ -19,6 +19,9 @@ import type { Tag } from './words/words.ts';
 /** The longest message that is read, in UTF-16 units; the platform's own limit. */
 export const LONGEST_MESSAGE = 4096;
 
+/** More lines than a round has; own threshold. Above it the lines are one message, and refused as such. */
+const MOST_LINES = 300;
+
 /** Tags of all words and phrases of some terms, shorter phrases inside longer ones included. */
 function cuesOf(terms: readonly Term[]): ReadonlySet<Tag> {
   const words = terms.flatMap(({ kind, text }) => (kind === 'word' ? text.split(/[ -]/) : ['\n']));
@@ -116,7 +119,7 @@ export function readMessage(text: string, settings: ReaderSettings, waiting?: Aw
   const terms = joinNumbers(splitTerms(folded, LEXICON));
   const lines = linesOf(terms);
   const round =
-    lines.length > 1
+    lines.length > 1 && lines.length <= MOST_LINES
       ? readRound(lines, (line) => setBoard(text, folded, line, settings), settings)
       : undefined;
   if (round) return understood(round.readings, round.shared);
