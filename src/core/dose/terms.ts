@@ -68,7 +68,8 @@ export function pKLine(
     times(between(ll, hl), minus(t1, temperature)),
     times(between(lh, hh), minus(temperature, t0)),
   );
-  const pK = line('dissociation', over(sum, times(minus(a1, a0), minus(t1, t0))), '', digits);
+  // One digit more than the rest, as it stands in an exponent.
+  const pK = line('dissociation', over(sum, times(minus(a1, a0), minus(t1, t0))), '', digits + 1);
   return { pK: pK.result, lines: [pK] };
 }
 
