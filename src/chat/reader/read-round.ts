@@ -64,6 +64,17 @@ const NOT_UNDERSTOOD: Draft = {
 const carriesFacts = ({ draft }: LineRead): boolean =>
   Object.keys(draft.fields).length > 0 || Object.keys(draft.marks).length > 0;
 
+/** Facts that may hold for several tanks: never a measured figure of one. */
+function sharedFields({
+  ph: _ph,
+  free_mg_L: _free,
+  total_mg_L: _total,
+  volume_L: _volume,
+  ...fields
+}: Fields): Fields {
+  return fields;
+}
+
 /** A line takes from the first what it does not say itself: its facts, and the wish to note a reading. */
 function withShared(draft: Draft, shared: Draft | undefined): Draft {
   const intent =
@@ -117,7 +128,7 @@ export function readRound(
   const [first] = read as [LineRead];
   const isPast = first.isPast && !opens(first);
   const isShared = !opens(first) && carriesFacts(first) && first.draft.problems.length === 0;
-  const shared = isShared ? first.draft : undefined;
+  const shared = isShared ? { ...first.draft, fields: sharedFields(first.draft.fields) } : undefined;
   const readings = groupsOf(read, opens).map((group): Reading => {
     const [line] = group;
     if (!line) return { ...NOT_UNDERSTOOD, assumed: {}, asks: [] };

@@ -7,6 +7,10 @@ function cueBetween(board: Board, from: number, to: number, cue: 'not' | 'if' | 
   return false;
 }
 
+/** `no sulfites added`. */
+const saysNo = (board: Board, i: number): boolean =>
+  [i - 1, i - 2, i - 3].some((k) => board.terms[k]?.text === 'no');
+
 function isFact(board: Board, i: number): boolean {
   const first = board.terms.findIndex(({ kind }) => kind === 'word');
   const asks = first >= 0 && first < i && isCue(board, first, 'question');
@@ -14,6 +18,7 @@ function isFact(board: Board, i: number): boolean {
     !asks &&
     !isMark(board, i + 1, '?') &&
     !cueBetween(board, i - 5, i, 'not') &&
+    !saysNo(board, i) &&
     !cueBetween(board, 0, i, 'if') &&
     !cueBetween(board, 0, i, 'not-yet')
   );
@@ -25,6 +30,6 @@ export function findPastTense(board: Board): void {
   const said = board.terms.findIndex((_, i) => board.taken[i] !== true && isCue(board, i, 'past'));
   if (said < 0) return;
   board.pastTense = isFact(board, said);
-  const negated = cueBetween(board, said - 5, said, 'not');
+  const negated = cueBetween(board, said - 5, said, 'not') || saysNo(board, said);
   if (negated) board.notes.push({ id: 'negated', text: '' });
 }

@@ -162,9 +162,21 @@ function isChatter(board: Board): boolean {
 const holdsAim = (board: Board): boolean =>
   board.findings.some(({ field }) => field === 'target' || field === 'volume_L');
 
+/** `3 tanks`: how many vessels is no figure of the wine. */
+function setCountsAside(board: Board): void {
+  for (let i = 0; i < board.terms.length; i++) {
+    if (
+      isFree(board, i) &&
+      termAt(board, i + 1).tags.some((tag) => tag === 'vessel:tank' || tag === 'vessel:other')
+    )
+      setAside(board, i, i + 1);
+  }
+}
+
 /** Reads the figures that nothing names: one as the pH, one as the free SO2; else it asks. */
 export function readUnlabelled(board: Board): void {
   if (!isCellarTalk(board) || isChatter(board)) return;
+  setCountsAside(board);
   const candidates = board.terms.map((_, i) => i).filter((i) => isFree(board, i));
   findPh(board, candidates);
   findFree(board, candidates);

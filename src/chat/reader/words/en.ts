@@ -53,8 +53,7 @@ export const en: Words = {
     'label:free': [
       'free', 'fre', 'freee', 'frre', 'fee so2', 'fso2', 'f so2', 'fs02', 'free so2', 'free so', 'so2 free',
       'free sulfur', 'free sulphur', 'free sulfur dioxide', 'free sulphur dioxide', 'free sulfite',
-      'free sulphite', 'fso', 'freeso2', 'free s02', 'f s02',
-    ],
+      'free sulphite', 'fso', 'freeso2', 'free s02', 'f s02', 'fr', 'fr so2'],
     'label:total': [
       'total', 'totl', 'totla', 'toal', 'tot', 'tso2', 't so2', 'ts02', 'total so2', 'so2 total', 'tot so2',
       'total sulfur', 'total sulphur', 'total sulfur dioxide', 'total sulphur dioxide', 'totals', 'total s02',
@@ -152,8 +151,7 @@ export const en: Words = {
       'sulfited', 'sulphited', 'sulfured', 'sulphured', 'made an addition', 'chucked in', 'just added',
       'dropped in', 'has gone in', 'addition made', 'addition done', 'pumped in', 'was added', 'were added',
       'have added', 'dissolved in', 'tipped in', 'dosed with', 'i put', 'we put', 'just put', 'have put',
-      'already put', 'has put', 'i put in', 'we put in', 'he put', 'she put', 'they put',
-    ],
+      'already put', 'has put', 'i put in', 'we put in', 'he put', 'she put', 'they put', 'finished adding', 'done adding', 'have now added', 'has been added', 'been added', 'have dosed'],
     'cue:if': [
       'if', 'what if', 'would', "i'd", 'suppose', 'supposing', 'say i', 'should i', 'could', 'might',
       'were to', 'shall i', 'assuming', 'in case', 'can i', 'unless', 'had i', 'when i have',
@@ -215,7 +213,7 @@ export const en: Words = {
       'solutn', 'in water', 'soluton',
     ],
     'cue:salt-word': ['salt', 'as salt', 'by salt', 'of salt', 'of the salt', 'as the salt', 'salt basis'],
-    'cue:powder': ['powder', 'pwd', 'powdered', 'crystals', 'crystal', 'dry'],
+    'cue:powder': ['powder', 'pwd', 'powdered', 'crystals', 'crystal', 'dry', 'assay', 'purity', 'yield', 'pure', 'strength', 'grade', 'so2 yield'],
     'cue:gas': [
       'gas', 'liquefied', 'liquified', 'liquid', 'cylinder', 'from the cylinder', 'bottled', 'compressed',
     ],
