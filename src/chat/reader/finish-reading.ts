@@ -18,7 +18,10 @@ function usualTarget({ style, category }: Fields, { targets }: ReaderSettings): 
 /** What is missing of the additive: its name, its strength, the size of its tablet. */
 function askAdditive({ marks }: Draft, fields: Fields, asks: Set<AskedField>): void {
   const { additive } = fields;
-  if (marks.unnamedAdditive && additive === undefined) asks.add('additive');
+  if (marks.unnamedAdditive && additive === undefined) {
+    asks.add('additive');
+    if (marks.unnamedSolution && fields.strength_percent === undefined) asks.add('strength_percent');
+  }
   if (marks.campden) {
     if (additive === undefined) asks.add('additive');
     if (fields.tablet_salt_g === undefined) asks.add('tablet_salt_g');

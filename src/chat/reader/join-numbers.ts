@@ -80,7 +80,8 @@ function isClaimedBefore(terms: readonly Term[], i: number): boolean {
 const isGluedToWord = (terms: readonly Term[], i: number): boolean =>
   (termIn(terms, i).gap === false &&
     (terms[i - 1]?.kind === 'word' || (terms[i - 1]?.text === '-' && termIn(terms, i - 1).gap === false))) ||
-  terms[i - 1]?.text === '/';
+  terms[i - 1]?.text === '/' ||
+  (terms[i - 1]?.text === '.' && terms[i - 1]?.gap === false);
 
 const unitFollows = (terms: readonly Term[], i: number): boolean =>
   has(terms[i], /^unit:(L|hL|m3|gal|galUS|galUK|mL|g|kg|lb)$/) || has(terms[i], /^cue:thousand$/);

@@ -89,6 +89,8 @@ export type VolumeUnit = 'L' | 'hL' | 'mL' | 'm3' | 'galUS' | 'galUK' | 'barrel'
 export interface Marks {
   /** A powder or solution was named without its cation. */
   unnamedAdditive?: true;
+  /** It was named as a solution, so that its strength is missing too. */
+  unnamedSolution?: true;
   /** A small plain tablet, whose salt and size may be missing. */
   campden?: true;
   /** An effervescent tablet whose size was not said. */

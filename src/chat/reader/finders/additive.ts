@@ -151,6 +151,7 @@ export function findAdditive(board: Board): void {
     else if (hasTag(board, i, 'additive:unnamed')) {
       const strength = strengthNear(board, i);
       board.marks.unnamedAdditive = true;
+      if (/sol(utio)?n/.test(termAt(board, i).text)) board.marks.unnamedSolution = true;
       claim(board, i, i);
       if (strength && strength.percent <= 25)
         find(board, 'strength_percent', strength.percent, 'labelled', strength.from, strength.to);

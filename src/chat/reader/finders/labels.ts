@@ -56,6 +56,12 @@ function findLabel(board: Board, i: number, label: LabelId): void {
     (label === 'so2' || label === 'free' || label === 'total' || label === 'ph')
   )
     return claimPairLabel(board, i);
+  const below =
+    beside.at < i &&
+    isMark(board, beside.at - 1, '-') &&
+    !termAt(board, beside.at - 1).gap &&
+    isFree(board, beside.at - 2);
+  if (below && label !== 'volume') return refuse(board, 'ambiguous-number', beside.at - 2, to);
   const range = isRangeAt(board, beside);
   if (range !== undefined && label !== 'volume') return refuse(board, 'ambiguous-number', from, range);
   const corrected = correctionAt(board, beside.to);

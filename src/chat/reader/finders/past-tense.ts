@@ -11,6 +11,10 @@ function cueBetween(board: Board, from: number, to: number, cue: 'not' | 'if' | 
 const saysNo = (board: Board, i: number): boolean =>
   [i - 1, i - 2, i - 3].some((k) => board.terms[k]?.text === 'no');
 
+/** `didn't add`, `do not add`: the negation stands right before the verb. */
+const declines = (board: Board, i: number): boolean =>
+  isCue(board, isCue(board, i - 1, 'to') ? i - 2 : i - 1, 'not');
+
 function isFact(board: Board, i: number): boolean {
   const first = board.terms.findIndex(({ kind }) => kind === 'word');
   const asks = first >= 0 && first < i && isCue(board, first, 'question');
@@ -27,8 +31,10 @@ function isFact(board: Board, i: number): boolean {
 /** Finds that something was added: a past-tense verb that is neither negated, conditional, asked nor still to come. */
 export function findPastTense(board: Board): void {
   if (board.marks.pastLine) board.pastTense = true;
+  const declined = board.terms.some((_, i) => isCue(board, i, 'add') && declines(board, i));
+  if (declined) board.notes.push({ id: 'negated', text: '' });
   const said = board.terms.findIndex((_, i) => board.taken[i] !== true && isCue(board, i, 'past'));
-  if (said < 0) return;
+  if (said < 0 || declined) return;
   board.pastTense = isFact(board, said);
   const negated = cueBetween(board, said - 5, said, 'not') || saysNo(board, said);
   if (negated) board.notes.push({ id: 'negated', text: '' });

@@ -66,7 +66,10 @@ function findCampden(board: Board, i: number): void {
   claim(board, i, i);
   if (size && size.mass_g > 0 && size.mass_g <= LARGEST_PLAIN_TABLET_g)
     find(board, 'tablet_salt_g', size.mass_g, 'unit', size.from, size.to);
-  const counted = count ?? after;
+  const apart = board.terms.findIndex(
+    (_, k) => isCue(board, k, 'tablet') && countBefore(board, k - 1) !== undefined,
+  );
+  const counted = count ?? after ?? (apart < 0 ? undefined : countBefore(board, apart - 1));
   if (counted !== undefined) find(board, 'tablets', figureAt(board, counted).value, 'unit', counted, counted);
 }
 

@@ -190,6 +190,7 @@ function governed(board: Board, i: number): { aim: Aim; label?: Aim['kind'] } | 
 }
 
 function findVerb(board: Board, i: number): void {
+  if (isCue(board, i, 'need') && isCue(board, i + 1, 'to')) return;
   const found = governed(board, i);
   if (!found) return;
   const { aim, label } = found;

@@ -131,11 +131,17 @@ function isDose(board: Board): boolean {
   );
 }
 
+/** A level to reach; a negated addition is none. */
+const aimsAtLevel = (board: Board): boolean => {
+  const target = findingOf(board, 'target')?.value;
+  return target !== undefined && !('add_mg_L' in target);
+};
+
 /** What a message wants. With nothing that is ours it is chat. */
 export function decideIntent(board: Board): Intent {
   if (isSolution(board)) return 'solution';
   if (isAdded(board)) return 'added';
-  if (isNegated(board) && !any(board, 'ph', 'free_mg_L', 'target')) return 'chat';
+  if (isNegated(board) && !any(board, 'ph', 'free_mg_L') && !aimsAtLevel(board)) return 'chat';
   if (isReading(board)) return 'reading';
   if (isEffect(board)) return 'effect';
   if (isDose(board)) return 'dose';

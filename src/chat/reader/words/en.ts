@@ -92,7 +92,7 @@ export const en: Words = {
       'add', 'addd', 'adding', 'ad', 'dose', 'dosing', 'to add', 'put in', 'give it', 'hit it with',
       'make an addition of', 'addition of', 'an addition of', 'add of',
     ],
-    'cue:addition': ['addition', 'add', 'adds', 'increase', 'rise', 'more', 'extra', 'bump', 'dose'],
+    'cue:addition': ['addition', 'add', 'adds', 'increase', 'rise', 'more', 'extra', 'bump', 'dose', 'addition for', 'addition to'],
     'cue:need': ['need', 'needs', 'needing', 'want', 'wants', 'require', 'requires', 'should get', 'wanted'],
     'cue:molecular': [
       'molecular', 'mol', 'molec', 'molecular so2', 'mso2', 'mol so2', 'active', 'active so2', 'moleculr',
