@@ -2,7 +2,7 @@ import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { dose } from '../../src/core/dose/dose.ts';
 import { toStep } from '../../src/core/dose/rounding.ts';
-import { plainText } from '../../src/core/working.ts';
+import { plainText, roundTo } from '../../src/core/working.ts';
 import { loose, wrongIn } from '../core/dose/evaluate-step.ts';
 import { requests } from './wines.ts';
 
@@ -25,6 +25,26 @@ describe('the working', () => {
         expect(rounded).toContain(size);
       }),
       { numRuns: 1500, seed: 3 },
+    );
+  });
+
+  test('says the free SO2 needed and the dose as the answer does, to three digits', () => {
+    fc.assert(
+      fc.property(requests, (request) => {
+        const answer = dose(request);
+        const printed = (...names: string[]): number | undefined =>
+          answer.steps.findLast(({ name }) => names.includes(name))?.result.value;
+        const pairs = [
+          [printed('free-needed'), answer.target_free_mg_L],
+          [printed('addition', 'dose-with-allowance', 'dose-with-share'), answer.dose_mg_L],
+        ] as const;
+        for (const [shown, exact] of pairs) {
+          // At a rounding mark the last bit of a double decides.
+          if (shown === undefined || exact === undefined || Math.abs(shown - exact) < 1e-12 * exact) continue;
+          expect(roundTo(shown, 3)).toBe(roundTo(exact, 3));
+        }
+      }),
+      { numRuns: 2000, seed: 9 },
     );
   });
 

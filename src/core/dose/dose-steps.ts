@@ -1,7 +1,7 @@
 import type { SO2Content } from '../additives/so2-content.ts';
 import type { Dissociation } from '../chemistry/dissociation.ts';
 import { SHOWN_UNITS, shown } from '../units/shown.ts';
-import { minus, over, roundTo, times, type Step, type Term } from '../working.ts';
+import { minus, over, times, type Step, type Term } from '../working.ts';
 import type { Aim } from './aim.ts';
 import { line, printAlike, withEnoughDigits, type Line } from './line.ts';
 import type { DoseRequest } from './request.ts';
@@ -115,7 +115,7 @@ const showsSame = (printed: number, { step, down, exact }: Rounded): boolean =>
 
 /** The figures on the way are said elsewhere in the reply too, with three digits. */
 const agrees = (printed: number | undefined, exact: number | undefined): boolean =>
-  printed === undefined || exact === undefined || roundTo(printed, 3) === roundTo(exact, 3);
+  printed === undefined || exact === undefined || printAlike(printed, exact, 3);
 
 function isRight(work: DoseWork, made: Made): boolean {
   const { rounded, roundedEach, aim } = work;

@@ -66,16 +66,18 @@ export function withEnoughDigits<T>(work: (digits: number) => T, isRight: (made:
 }
 
 /**
- * Whether two figures print alike with four significant digits.
+ * Whether two figures print alike; a hair apart at a rounding mark, they do.
  *
  * @param a in any unit, finite
  * @param b in the unit of `a`: mg/L, g, mL
+ * @param digits significant digits, 4 by default
  *
  * @example
  * ```ts
  * printAlike(26.9075, 26.91) // => true
+ * printAlike(11.25, 11.249999999999998, 3) // => true
  * ```
  */
-export function printAlike(a: number, b: number): boolean {
-  return roundTo(a, FEWEST_DIGITS) === roundTo(b, FEWEST_DIGITS);
+export function printAlike(a: number, b: number, digits: number = FEWEST_DIGITS): boolean {
+  return Math.abs(a - b) <= 1e-12 * Math.abs(b) || roundTo(a, digits) === roundTo(b, digits);
 }

@@ -58,9 +58,9 @@ const isCoarse = (change: number, amount: number, dose_mg_L: number | undefined)
  * ```
  */
 export function toStep(amount: number, step: number, down = false): number {
-  const steps = amount / step;
-  // A figure a hair below a whole step is that step: 2.9999999999 tablets are three.
-  return Number(((down ? Math.floor(steps + 1e-9) : Math.round(steps)) * step).toFixed(2));
+  // A figure a hair below a mark is at the mark: 2.9999999999 tablets are three.
+  const steps = (amount / step) * (1 + 1e-10);
+  return Number(((down ? Math.floor(steps) : Math.round(steps)) * step).toFixed(2));
 }
 
 /**

@@ -17,6 +17,17 @@ const outside = (field: BoundedField): number[] => {
 };
 const NAMES = Object.keys(BOUNDS) as BoundedField[];
 
+// What no cellar has: own thresholds, except for the pH in which a dose means anything.
+test.each([
+  ['volume_L', 0, 10_000_000],
+  ['mass_g', 0, 100_000_000],
+  ['free_mg_L', 0, 1000],
+  ['ph', 2.5, 4.8],
+  ['binding_share', 0, 0.8],
+] as const)('%s lies from %d to %d', (field, min, max) => {
+  expect(BOUNDS[field]).toMatchObject({ min, max });
+});
+
 test.each(NAMES)('%s keeps to its bounds', (field) => {
   for (const value of outside(field)) expect(isWithinBounds(field, value)).toBe(false);
   expect(isWithinBounds(field, BOUNDS[field].max)).toBe(true);

@@ -35,6 +35,9 @@ describe('a finer step is taken where more than 1 % of the dose and more than 0.
   test.each([
     [10.5, 'scale', 27, 10.5], // 10 or 11 would be 4.8 %, 1.3 mg/L
     [10.5, 'scale', 10, 11], // 4.8 % but 0.48 mg/L
+    [20.44, 'scale', 27, 20.4], // 20 would be 2.2 %, 0.58 mg/L
+    [20.44, 'scale', 22, 20], // … and here 0.47 mg/L
+    [30.4, 'scale', 60, 30.4], // 30 would be 1.3 %, 0.79 mg/L
     [60.4, 'scale', 100, 60], // 0.66 mg/L but 0.7 %
     [4.67, 'scale', 27, 4.7], // 0.6 %
     [0.467, 'scale', 27, 0.47], // 0.5 would be 7 %
@@ -71,6 +74,7 @@ describe('tablets are counted down to the half', () => {
     [0.5, 0.5],
     [1.59, 1.5],
     [2.9999999999, 3],
+    [2.999, 2.5],
     [3, 3],
   ])('%d tablets are %d', (amount, value) => {
     expect(measureOf(amount, 'tablets', { dose_mg_L: 27 }).measure).toEqual({ value, unit: 'tablets' });

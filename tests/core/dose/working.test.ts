@@ -61,6 +61,11 @@ describe('a working as it is printed', () => {
     expect(steps.map((step) => step.substituted)).toContain('26.91 mg/L * 5488.85 L');
   });
 
+  test('a figure at a rounding mark does not run into fifteen digits', () => {
+    const { steps } = doseOf({ target: { add_mg_L: 7.5 }, targetStated: true, binding_share: 1 / 3 });
+    expect(steps.map(({ result }) => result.value)).toEqual([0.351, 11.25, 61.75, 107.2]);
+  });
+
   test('the OIV basis shows how its pK was found', () => {
     const { steps } = doseOf({ ...US, basis: 'oiv', alcohol_percent: 13.5, temperature_C: 22 });
     expect(steps[0]).toMatchObject({ name: 'dissociation', symbol: 'pK', source: 'oiv-as323-04c-table-2' });
