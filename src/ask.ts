@@ -1,4 +1,9 @@
-import { runAsk } from './edge/ask/run-ask.ts';
+import { enableCompileCache } from 'node:module';
+
+// As in main.ts: what was compiled is kept between runs.
+enableCompileCache();
+
+const { runAsk } = await import('./edge/ask/run-ask.ts');
 
 process.exitCode = await runAsk({
   args: process.argv.slice(2),
