@@ -89,7 +89,7 @@ choice-head = { at }a choice, not a dose: at pH { $ph }, { $target } molecular t
 choice-leave = { $mark } Leave it: { $free } free is { $molecular } molecular.
 choice-to = { $mark } To { $free } ({ $molecular } molecular): { $amount } { additive }
 choice-no-amount = { $mark } To { $free } ({ $molecular } molecular): no amount, the total would pass the limit on file.
-ways-out = Ways out: colder, cleaner, checked more often; or acid for a lower pH: ask someone qualified first.
+ways-out = Or: colder, cleaner, checked more often; acid for a lower pH: ask someone qualified.
 
 ## The stage
 
@@ -100,7 +100,7 @@ condition-red =
         [over] If it is red (0.6 molecular): no amount, it would pass the limit.
        *[other] If it is red (0.6 molecular): { $amount }{ red-unit }.
     }
-condition-red-choice = If it is red, the full target is 0.6 molecular: button More.
+condition-red-choice = If it is red, full is 0.6 molecular: More.
 round-red =
     { $amount ->
         [none] { at }if red (0.6 molecular), nothing to add.
@@ -175,6 +175,7 @@ reading-read = { at }{ $list }.
 not-kept-reading = Not kept yet: I keep no readings so far, so write it in your book.
 solution-weigh = Weigh { $amount } { additive } and fill up with water to { $volume }.
 solution-measure = Measure { $amount } { additive } and fill up with water to { $volume }.
+solution-no-recipe = For a solution to store or to clean with I have no recipe yet. A stock I can do: make 5 L of 10% kmbs
 solution-bought = Fill { $volume } with { additive } as it is sold.
 solution-strength = That stock holds { $strength } g SO2 in 100 mL.
 solution-fresh = Make it fresh and label it: it loses strength in days to weeks.
@@ -219,7 +220,11 @@ assumed-gallon = { $gallon ->
         [US] US gallons
        *[imperial] imperial gallons
     }
-assumed-barrels = { $volume } at 225 L a barrel
+assumed-barrels =
+    { $count ->
+        [one] a barrel of 225 L
+       *[several] { $volume } at 225 L a barrel
+    }
 note-free-unlabelled = “{ $text }” is free SO2
 note-ph-unlabelled = “{ $text }” is the pH
 note-volume-sum = “{ $text }” added up
@@ -284,6 +289,7 @@ problem-ambiguous-number =
         [range] { at }“{ $about }” looks like a range. Send one figure, and say what it is.
        *[other] { at }“{ $about }” can be read in more than one way. Say what it is, like: pH 3.58 free 21 1450 gal
     }
+problem-each-or-total = { at }is “{ $about }” of each, or of all together? Write: { $about } each, or: { $about } total
 problem-conflicting-values = { at }two values for one thing: “{ $about }”. Send one of them; two wines go on a line each.
 problem-unknown-additive = { at }“{ $about }” is no SO2 additive that I know. I know: potassium or sodium metabisulfite (powder, solution), bisulfite, SO2 in water, SO2 gas, tablets.
 problem-did-you-mean = { at }“{ $about }” is another chemical. Did you mean metabisulfite? Then send it again with that word.
@@ -308,7 +314,8 @@ warning-total-near-limit =
         [known] ⚠ Total would be { $total_after_mg_L } { $unit }, near the { $limit_mg_L } of the international code; your country’s law decides.
        *[at-least] ⚠ Total would be at least { $total_after_mg_L } { $unit }, near the { $limit_mg_L } of the international code; your country’s law decides.
     }
-warning-total-unknown = ⚠ The total is unknown: measure it, free alone comes over half of the { $limit_mg_L } { $unit } limit.
+warning-total-unknown = ⚠ The total is unknown: measure it.
+warning-total-unknown-half = ⚠ The total is unknown: measure it, free alone comes over half of the { $limit_mg_L } { $unit } limit.
 warning-no-limit-on-file = ⚠ No limit on file for this wine: look up your country’s law.
 warning-limit-unconfirmed = ⚠ The limit is unconfirmed: look up your country’s law.
 warning-addition-large = ⚠ { $dose_mg_L } { $unit } at once is a lot: check the volume and its unit.
@@ -316,8 +323,8 @@ warning-free-needed-high = ⚠ { $target_free_mg_L } { $unit } free is a lot: ke
 warning-molecular-above-2 = ⚠ Above 2 { $unit } molecular SO2 is smelt and tasted.
 warning-free-low-may-bind-all = ⚠ Below 10 free much or all may bind: measure before adding again.
 warning-ph-unusual = ⚠ pH { $ph } is unusual for wine: check the meter.
-warning-basis-fallback = ⚠ The OIV basis needs alcohol and temperature (20–40 °C): reckoned with pK 1.81.
-warning-basis-fallback-change = ⚠ The OIV basis needs alcohol and temperature (20–40 °C): reckoned with pK 1.81; it would change the need by about { $need_change_mg_L } { $unit }.
+warning-basis-fallback = ⚠ The OIV basis needs alcohol, and 20–40 °C: reckoned with pK 1.81.
+warning-basis-fallback-change = ⚠ The OIV basis needs alcohol, and 20–40 °C: reckoned with pK 1.81; it changes the need by about { $need_change_mg_L } { $unit }.
 warning-rounding-coarse = ⚠ What a scale shows is off by { $rounding_mg_L } { $unit } here: use a finer one, or a stock.
 warning-already-dosed = ⚠ It was dosed lately.
 

@@ -45,15 +45,11 @@ export function completes(waiting: Reading, next: Reading): boolean {
 /** The waiting reading with the fields of its answer; what is assumed and what is still missing is worked out anew. */
 export function complete(waiting: Reading, next: Partial<Reading>, settings: Settings): Reading {
   const fields: Fields = { ...waiting.fields, ...next.fields };
-  const below = (fields.total_mg_L ?? Infinity) < (fields.free_mg_L ?? 0);
   const { assumed: _assumed, asks: _asks, ...draft } = waiting;
   return finishReading(
     {
       ...draft,
       fields,
-      problems: below
-        ? [{ code: 'total-below-free', about: `${fields.free_mg_L}/${fields.total_mg_L}` }]
-        : waiting.problems,
       setAside: [...waiting.setAside, ...(next.setAside ?? [])],
       notes: [...waiting.notes, ...(next.notes ?? [])],
       marks: { ...waiting.marks, ...next.marks },

@@ -4,6 +4,7 @@ import type { DecimalMark } from '../replies/number-text.ts';
 import type { Line } from '../replies/reply.ts';
 import { answerSingle } from './answer-single.ts';
 import { parseKey } from './buttons.ts';
+import { checkFields } from './check-fields.ts';
 import { complete } from './complete.ts';
 import { line } from './lines/line.ts';
 import { questionLine } from './lines/question.ts';
@@ -26,7 +27,7 @@ export function handlePress(
   const button = parseKey(key);
   const found = memory.remembered.find(({ number }) => number === button?.number);
   if (!button || !found) return saying(settings, [line('first', 'old-button')]);
-  const again = (reading: Reading): Handled => answerAgain(message, reading, memory, settings);
+  const again = (reading: Reading): Handled => answerAgain(message, checkFields(reading), memory, settings);
   switch (button.does) {
     case 'w':
       return saying(settings, workingOf(found.reading, markOf(memory), settings));

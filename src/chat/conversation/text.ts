@@ -3,6 +3,7 @@ import type { Understood } from '../reader/understood.ts';
 import { answerRound } from './answer-round.ts';
 import { answerSingle } from './answer-single.ts';
 import { bareNumberAfterTarget, isBareNumber, numberAskedAbout } from './bare-number.ts';
+import { checkFields } from './check-fields.ts';
 import { complete, completes } from './complete.ts';
 import type { Memory, Waiting } from './memory.ts';
 import type { Handled, IncomingMessage } from './ports.ts';
@@ -22,7 +23,7 @@ export function handleText(
   const mark = text.trim().toLowerCase();
   const letter = waiting?.letters[mark];
   if (waiting && letter) {
-    const reading = complete(waiting.reading, { fields: letter }, settings);
+    const reading = checkFields(complete(waiting.reading, { fields: letter }, settings));
     const understood: Understood = {
       readings: [reading],
       shared: {},
@@ -40,9 +41,13 @@ export function handleText(
     waiting?.field === 'additive' && isBareNumber(mark)
       ? numberAskedAbout(mark, settings, memory.decimalMark)
       : readMessage(text, settings, waiting);
-  return understood.readings.length === 1
-    ? answerSingle(message, completed(understood, waiting, settings), memory, settings)
-    : answerRound(message, understood, memory, settings);
+  if (understood.readings.length === 1)
+    return answerSingle(message, checked(completed(understood, waiting, settings)), memory, settings);
+  return answerRound(message, checked(understood), memory, settings);
+}
+
+function checked(understood: Understood): Understood {
+  return { ...understood, readings: understood.readings.map((one) => checkFields(one, understood.shared)) };
 }
 
 /** The message with its one reading completed by the one that waits, where it completes it. */

@@ -40,8 +40,8 @@ export function rowsOf(text: string, columns: number): number {
 const textOf = (lines: readonly SpokenLine[]): string => lines.map(({ text }) => text).join('\n');
 
 /**
- * The text of a reply: a line a row, and where that is more than a phone shows, first the working and then the
- * warnings but the weightiest stand behind the button `More`. Cautions and assumptions always stay.
+ * The text of a reply: a line a row, and where that is more than a phone shows, first the working, then the
+ * warnings but the weightiest, then that one too stand behind the button `More`. Cautions and assumptions always stay.
  *
  * @example
  * ```ts
@@ -57,8 +57,8 @@ export function fold(lines: readonly SpokenLine[], saidOfFolded: () => string): 
   const folded = textOf([...withoutWorking, note]);
   if (rowsOf(folded, PHONE_COLUMNS) <= MOST_ROWS) return folded;
   const firstWarning = lines.find(({ line }) => line.room === 'warning');
-  return textOf([
-    ...withoutWorking.filter((one) => !(one.line.room === 'warning' && one !== firstWarning)),
-    note,
-  ]);
+  const withWarning = (kept: SpokenLine | undefined): string =>
+    textOf([...withoutWorking.filter((one) => one.line.room !== 'warning' || one === kept), note]);
+  const withOne = withWarning(firstWarning);
+  return rowsOf(withOne, PHONE_COLUMNS) <= MOST_ROWS ? withOne : withWarning(undefined);
 }

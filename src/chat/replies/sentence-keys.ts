@@ -28,7 +28,7 @@ export interface SentenceValues {
   'ask-volume_L': 'unit' | 'vessel';
   assumed: 'list';
   'assumed-additive': 'additive';
-  'assumed-barrels': 'volume';
+  'assumed-barrels': 'count' | 'volume';
   'assumed-gallon': 'gallon';
   'assumed-separator': never;
   'assumed-target': 'kind' | 'value';
@@ -161,6 +161,7 @@ export interface SentenceValues {
   'problem-ambiguous-number': 'about' | 'kind' | 'vessel';
   'problem-conflicting-values': 'about' | 'vessel';
   'problem-did-you-mean': 'about' | 'vessel';
+  'problem-each-or-total': 'about' | 'vessel';
   'problem-negative-value': 'about' | 'vessel';
   'problem-no-number': never;
   'problem-not-understood': never;
@@ -187,6 +188,7 @@ export interface SentenceValues {
   'solution-bought': 'additive' | 'volume';
   'solution-fresh': never;
   'solution-measure': 'additive' | 'amount' | 'volume';
+  'solution-no-recipe': never;
   'solution-strength': 'strength';
   'solution-weigh': 'additive' | 'amount' | 'volume';
   'stage-now': 'stage';
@@ -238,7 +240,8 @@ export interface SentenceValues {
   'warning-rounding-coarse': 'rounding_mg_L' | 'unit';
   'warning-total-near-limit': 'limit_mg_L' | 'total' | 'total_after_mg_L' | 'unit';
   'warning-total-over-limit': 'limit_mg_L' | 'total' | 'total_after_mg_L' | 'unit';
-  'warning-total-unknown': 'limit_mg_L' | 'unit';
+  'warning-total-unknown': never;
+  'warning-total-unknown-half': 'limit_mg_L' | 'unit';
   'ways-out': never;
   weigh: 'vessel';
   working: 'result' | 'substituted';

@@ -1,6 +1,5 @@
 import { expect, test } from 'vitest';
 import { FRESH_MEMORY } from '../../../src/chat/conversation/memory.ts';
-import { REMEMBERED } from '../../../src/chat/conversation/next-memory.ts';
 import { DEFAULT_SETTINGS, withUnits } from '../../../src/chat/conversation/settings.ts';
 import { say, startTalk, textOf } from './talk.ts';
 
@@ -23,10 +22,10 @@ test('a write names the conversation and nothing of the message', () => {
   expect(write?.who).toStrictEqual({ cellar: 'harbour cellar', chat: 'one', person: 'Ana' });
 });
 
-test(`the last ${REMEMBERED} readings are remembered, and a button of an older one gets a kind line`, () => {
+test('the last 20 readings are remembered, and a button of an older one gets a kind line', () => {
   const talk = startTalk();
-  for (let count = 0; count <= REMEMBERED; count += 1) talk.write(FULL);
-  expect(talk.memory.remembered).toHaveLength(REMEMBERED);
+  for (let count = 0; count <= 20; count += 1) talk.write(FULL);
+  expect(talk.memory.remembered).toHaveLength(20);
   expect(textOf(talk.press('w:1'))).toContain('older message');
   expect(textOf(talk.press('w:2'))).toContain('the working');
 });
@@ -61,6 +60,18 @@ test('beside a problem there is no answer, no button of a dose and nothing to we
   const handled = startTalk().write('ph 36 1,450 gal free 22');
   expect(handled.answers).toEqual([null]);
   expect(handled.replies.flatMap(({ buttons }) => buttons)).toEqual([]);
+  expect(textOf(handled)).not.toMatch(/weigh/i);
+});
+
+test('who wants to stop a fermentation gets the figure, that it does not, and no amount to weigh', () => {
+  const handled = startTalk().write('1 g kmbs per 10 L to stop the ferment');
+  expect(handled.answers?.[0]).toMatchObject({
+    adds_mg_L: expect.closeTo(57.6, 1) as number,
+    warnings: expect.arrayContaining([
+      expect.objectContaining({ code: 'does-not-stop-fermentation' }),
+    ]) as unknown[],
+  });
+  expect(textOf(handled)).toMatch(/bottles can burst: ask someone qualified/);
   expect(textOf(handled)).not.toMatch(/weigh/i);
 });
 

@@ -1,7 +1,20 @@
 import { describe, expect, test } from 'vitest';
+import type { Reading } from '../../../src/chat/reader/understood.ts';
+import { waitsFor } from '../../../src/chat/conversation/waiting.ts';
 import { startTalk, textOf } from './talk.ts';
 
 const MINUTE_ms = 60_000;
+const READING: Reading = {
+  intent: 'dose',
+  fields: {},
+  assumed: {},
+  asks: [],
+  problems: [],
+  setAside: [],
+  notes: [],
+  marks: {},
+  where: {},
+};
 const fieldsAfter = (...messages: readonly string[]): unknown => {
   const talk = startTalk();
   return messages.map((text) => talk.write(text)).at(-1)?.understood?.readings[0]?.fields;
@@ -34,6 +47,11 @@ describe('a message completes the reading that waits', () => {
 describe('a message starts a new reading', () => {
   test.each([
     ['another vessel', ['T4 pH 3.5 free 20', 'T5 40 hl'], { vessel: 'tank 5', volume_L: 4000 }],
+    [
+      'several vessels in place of one',
+      ['T4 pH 3.5 free 20', 'B1-B2 225 L'],
+      { vessels: ['B1', 'B2'], volume_L: 450 },
+    ],
     ['a value that contradicts', ['T4 pH 3.5 free 20', 'pH 3.6 40 hl'], { ph: 3.6, volume_L: 4000 }],
     [
       'another intent',
@@ -112,6 +130,23 @@ test('letters choose while their field waits, small or capital', () => {
 
 test('a letter is no choice where none waits', () => {
   expect(startTalk().write('b').understood?.readings[0]?.fields).toEqual({});
+});
+
+test.each([
+  [{ stage: 'must' }, ['target'], undefined],
+  [{ stage: 'malolactic' }, ['target'], undefined],
+  [{ stage: 'must' }, ['volume_L', 'target'], 'volume_L'],
+  [{ category: 'fortified' }, ['target'], 'target'],
+  [{}, [], undefined],
+] as const)('of %j, which asks %j, there waits: %s', (fields, asks, field) => {
+  expect(waitsFor({ ...READING, fields, asks })).toBe(field);
+});
+
+test('while another target is asked a bare number is the target, though buttons stand above', () => {
+  const talk = startTalk();
+  talk.write('T4 40 hl pH 3.5 free 20');
+  talk.press('t:1');
+  expect(talk.write('3').understood?.readings[0]?.fields.target).toEqual({ free_mg_L: 3 });
 });
 
 test('another target is asked for and waits, without the one before', () => {

@@ -30,7 +30,7 @@ export function partialDose(reading: Reading, request: DoseRequest, answer: Dose
       ...(says ? question : []),
       ...factLines(reading, manner),
       ...assumedLines(reading, manner),
-      ...warningLines(answer.warnings, manner),
+      ...warningLines(answer.warnings, manner, 'warning', ['no-dose-at-this-stage']),
     ],
     buttons,
     ...(waits !== undefined && { waits }),

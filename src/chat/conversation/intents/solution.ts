@@ -23,6 +23,8 @@ export function answerSolution(reading: Reading, turn: Turn): Outcome {
   if (reading.asks.length > 0 || request === undefined) return missing(reading, turn);
   const { manner } = turn;
   const answer = solution(request);
+  if (answer.salt_g === undefined && answer.strength_SO2_g_per_100_mL === undefined)
+    return noRecipe(reading, turn);
   const { id } = request.additive;
   const inFull = !turn.cautioned.has(id);
   const first = firstOfSolution(answer, id, turn);
@@ -41,6 +43,12 @@ export function answerSolution(reading: Reading, turn: Turn): Outcome {
     buttons: buttonsFor(turn.number, inFull ? ['w'] : ['w', 's']),
     ...(inFull && { cautioned: id }),
   };
+}
+
+/** A solution to hold barrels or to clean with has a recipe of its own, which is not served yet. */
+function noRecipe(reading: Reading, { manner }: Turn): Outcome {
+  const first = line('first', 'solution-no-recipe');
+  return { answer: null, inRound: [first], lines: [first, ...factLines(reading, manner)], buttons: [] };
 }
 
 function strengthLine({ strength_SO2_g_per_100_mL: SO2_g }: SolutionAnswer, { manner }: Turn): Line[] {

@@ -3,6 +3,7 @@ import type { Line } from '../../replies/reply.ts';
 import { volumeText } from '../../replies/volume-text.ts';
 import type { SentenceKey } from '../../replies/sentence-keys.ts';
 import type { Manner } from '../manner.ts';
+import { countOf } from '../to-requests.ts';
 import { listLine, part } from './line.ts';
 import { noteParts } from './notes.ts';
 import { targetValues } from './target-text.ts';
@@ -21,14 +22,20 @@ export function assumedLines(reading: Reading, manner: Manner, weighs = true): L
   ];
 }
 
-function filledIn({ assumed, fields, asks }: Reading, manner: Manner, weighs: boolean): Part[] {
+function filledIn(reading: Reading, manner: Manner, weighs: boolean): Part[] {
+  const { assumed, fields, asks } = reading;
   const parts: Part[] = [];
   if (weighs && assumed.additive !== undefined && !asks.includes('additive'))
     parts.push(part('assumed-additive', { additive: assumed.additive }));
   if (assumed.target) parts.push(part(targetKey(fields), targetValues(assumed.target, manner)));
   if (assumed.gallon) parts.push(part('assumed-gallon', { gallon: assumed.gallon }));
   if (assumed.volume_L !== undefined)
-    parts.push(part('assumed-barrels', { volume: volumeText(assumed.volume_L, 'L', manner.mark) }));
+    parts.push(
+      part('assumed-barrels', {
+        volume: volumeText(assumed.volume_L, 'L', manner.mark),
+        count: countOf(reading) === undefined ? 'one' : 'several',
+      }),
+    );
   return parts;
 }
 

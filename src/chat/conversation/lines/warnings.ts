@@ -58,6 +58,11 @@ export function allWarningLines(warnings: readonly Warning[], manner: Manner): L
 
 function warningLine({ code, values }: Told, manner: Manner, room: Line['room']): Line {
   const texts = Object.entries(values).map(([name, value]) => [name, textOf(name, value, manner)] as const);
+  if (code === 'total-unknown' && totalMatters({ code, values }))
+    return line(room, 'warning-total-unknown-half', {
+      limit_mg_L: textOf('limit_mg_L', values['limit_mg_L'] ?? '', manner),
+      unit: manner.unit,
+    });
   const tellsChange = code === 'basis-fallback' && values['need_change_mg_L'] !== undefined;
   return line(room, tellsChange ? 'warning-basis-fallback-change' : `warning-${code}`, {
     unit: manner.unit,
