@@ -134,6 +134,7 @@ effect-land = { $after } { $unit } free if nothing binds; expect { $low }–{ $h
 effect-land-molecular = From { $molecularNow } to { $molecular } molecular: { $after } { $unit } free if nothing binds; expect { $low }–{ $high }, as a third to a half usually binds; measure tomorrow.
 effect-land-to-molecular = To { $molecular } molecular: { $after } { $unit } free if nothing binds; expect { $low }–{ $high }, as a third to a half usually binds; measure tomorrow.
 effect-land-low = { $after } { $unit } free if nothing binds; below 10 free much or all may bind: expect { $low }–{ $high }, measure before you add again.
+effect-must = Most of it binds while the must ferments: it does not protect the wine later.
 effect-raise = + { $dose } { $unit } if nothing binds; a third to a half usually binds; measure tomorrow.
 effect-allowance = Dose × { $factor } for + { $percent } %: reaches { $after } { $unit } if at most { $covers } % binds; a third binding needs half as much again. Expect { $low }–{ $high }; measure tomorrow.
 effect-allowance-bare = Dose × { $factor } for + { $percent } %: covers { $covers } % binding; a third binding needs half as much again. Measure tomorrow.
@@ -258,6 +259,7 @@ ask-target-stage =
         [must] { at }how many mg/L do you want to add to the must? Write it with the figures, like: T4 40 hl must add 40 ppm
        *[base] { at }how many mg/L do you want to add to the base wine? Write it with the figures, like: T4 40 hl base wine add 20 ppm
     }
+ask-tablet-additive = { at }which salt are the tablets? It stands on the packet.
 ask-additive = { at }which additive is it?
 ask-strength_percent = { at }how strong is it, in %? It stands on the label. Like: 10%
 ask-tablet_salt_g = { at }how many grams is one tablet? It stands on the packet; 0.44 and 0.55 are usual.

@@ -4,6 +4,7 @@ import { numberText, type DecimalMark } from '../replies/number-text.ts';
 import type { Button, Line } from '../replies/reply.ts';
 import type { SentenceKey } from '../replies/sentence-keys.ts';
 import { perLitre, type Manner } from './manner.ts';
+import { shownChoices } from './shown-choices.ts';
 import { letterAt } from './waiting.ts';
 
 /** What a button does; its key is `does:number`, of a choice `does:number:which`. */
@@ -56,10 +57,10 @@ export function doseButtons(number: number, applies: Applies): Button[] {
 
 /** A button for each way out of a choice, then all the rest. */
 export function choiceButtons(number: number, choices: readonly DoseChoice[], manner: Manner): Button[] {
-  const ways = choices.map((choice, at): Button => {
+  const ways = shownChoices(choices).map(({ choice, place }, at): Button => {
     const values: Line['values'] = { free: perLitre(choice.free_mg_L, manner) };
     const label = choice.target === undefined ? 'button-choice-leave' : 'button-choice-to';
-    return { key: `c:${number}:${at}`, mark: String(at + 1), label, values };
+    return { key: `c:${number}:${place}`, mark: String(at + 1), label, values };
   });
   return [...ways, { key: `m:${number}`, mark: String(ways.length + 1), label: LABELS.m, values: {} }];
 }

@@ -20,6 +20,7 @@ export interface SentenceValues {
   'ask-mass_g': 'vessel';
   'ask-ph': 'vessel';
   'ask-strength_percent': 'vessel';
+  'ask-tablet-additive': 'vessel';
   'ask-tablet_SO2_g': 'vessel';
   'ask-tablet_salt_g': 'vessel';
   'ask-target': 'usual' | 'vessel';
@@ -104,6 +105,7 @@ export interface SentenceValues {
   'effect-land-low': 'after' | 'high' | 'low' | 'unit';
   'effect-land-molecular': 'after' | 'high' | 'low' | 'molecular' | 'molecularNow' | 'unit';
   'effect-land-to-molecular': 'after' | 'high' | 'low' | 'molecular' | 'unit';
+  'effect-must': never;
   'effect-raise': 'dose' | 'unit';
   'effect-share': 'after' | 'high' | 'low' | 'share' | 'unit';
   'effect-share-bare': 'share';

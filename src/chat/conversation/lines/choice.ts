@@ -5,6 +5,7 @@ import { numberText } from '../../replies/number-text.ts';
 import { concentrationText, measureText, molecularText } from '../../replies/quantity-text.ts';
 import type { Line } from '../../replies/reply.ts';
 import { perLitre, type Manner } from '../manner.ts';
+import { shownChoices } from '../shown-choices.ts';
 import { line } from './line.ts';
 
 /** The first lines where a usual target would need so much free SO2 that a person has to choose. */
@@ -22,7 +23,9 @@ export function choiceLines(
     target: molecularText(target_molecular_mg_L ?? 0, manner.mark),
     free: perLitre(target_free_mg_L ?? 0, manner),
   });
-  const ways = choices.map((choice, at) => optionLine(choice, String(at + 1), additive, manner));
+  const ways = shownChoices(choices).map(({ choice }, at) =>
+    optionLine(choice, String(at + 1), additive, manner),
+  );
   return [head, ...ways, line('first', 'ways-out')];
 }
 

@@ -19,6 +19,7 @@ export function expectationLines(
   if (percent !== undefined && percent > 0)
     return [...allowance(percent, answer, manner), ...asOther(reading, other, manner)];
   if (share !== undefined) return [...shareLost(share, answer, manner), ...asOther(reading, other, manner)];
+  if (reading.fields.stage === 'must') return [line('effect', 'effect-must')];
   const landing = landingLine(reading, answer, manner);
   if (landing) return [landing];
   if (answer.dose_mg_L === undefined) return [];

@@ -24,6 +24,8 @@ function questionOf(field: AskedField, reading: Reading, settings: Settings): Om
     return { key: 'ask-volume_L', values: { unit: settings.volumeUnit } };
   }
   if (field === 'target') return targetQuestion(reading);
+  if (field === 'additive' && reading.asks.includes('tablet_salt_g'))
+    return { key: 'ask-tablet-additive', values: {} };
   if (field === 'mass_g' && noteText(reading, 'spoon') !== undefined)
     return { key: 'ask-mass-spoon', values: {} };
   return { key: `ask-${field}`, values: { unit } };
