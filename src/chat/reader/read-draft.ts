@@ -21,7 +21,10 @@ import { findSolutionUse } from './finders/solution-use.ts';
 import { findSpoon } from './finders/spoon.ts';
 import { findStage, mostCautious } from './finders/stage.ts';
 import { findTablets } from './finders/tablets.ts';
+import { findMolecular } from './finders/molecular.ts';
 import { findTarget } from './finders/target.ts';
+import { findWay } from './finders/way.ts';
+import { findAddition } from './finders/addition.ts';
 import { findVessel } from './finders/vessel.ts';
 import { findVolume } from './finders/volume.ts';
 import { settleBounds } from './refine/bounds.ts';
@@ -49,7 +52,10 @@ const FINDERS: readonly Finder[] = [
   findVolume,
   findMass,
   findNumberWord,
+  findWay,
   findTarget,
+  findMolecular,
+  findAddition,
   findLabelled,
   findPercentAndDegree,
   findKind,

@@ -28,7 +28,7 @@ const isLabelled = (board: Board, i: number): boolean =>
 function strengthFrom(board: Board, i: number): StrengthAt | undefined {
   if (!isFree(board, i) || isMark(board, i - 1, '+') || isLabelled(board, i - 1)) return undefined;
   const { value } = figureAt(board, i);
-  const percent = isMark(board, i + 1, '%') || ['percent', 'pct'].includes(board.terms[i + 1]?.text ?? '');
+  const percent = isMark(board, i + 1, '%') || isCue(board, i + 1, 'percent');
   if (percent && !isLabelled(board, i + 2)) return { percent: value, from: i, to: i + 1, perLitre: false };
   const per = concentrationAt(board, i + 1);
   return per?.id === 'g/L' ? { percent: value / 10, from: i, to: per.to, perLitre: true } : undefined;
@@ -75,8 +75,6 @@ function cueNear(board: Board, from: number, to: number, cue: 'solution' | 'salt
 const hasMillilitres = (board: Board): boolean =>
   (['mL', 'cL', 'floz'] as const).some((unit: UnitId) => board.cues.has(`unit:${unit}`));
 
-const CLEAR_NAME = /water|acid|h2so3|aqueous|sulfurous|sulphurous|sulfurosa|saure/;
-
 function solutionOf(id: AdditiveId): AdditiveId {
   return id === 'potassium-metabisulfite'
     ? 'potassium-metabisulfite-solution'
@@ -111,7 +109,7 @@ function findKnown(board: Board, i: number, named: AdditiveId): void {
     keep(board, named, i, i);
     return refuse(board, 'ambiguous-number', strength.from, strength.to);
   }
-  const read = readStrength(id, percent, saysSalt, CLEAR_NAME.test(termAt(board, i).text));
+  const read = readStrength(id, percent, saysSalt, isCue(board, i, 'in-water-name'));
   if ('problem' in read) {
     const twoNames = id === 'sulfur-dioxide-solution' && read.problem === 'ambiguous-number';
     if (twoNames) claim(board, i, i);
@@ -151,7 +149,7 @@ export function findAdditive(board: Board): void {
     else if (hasTag(board, i, 'additive:unnamed')) {
       const strength = strengthNear(board, i);
       board.marks.unnamedAdditive = true;
-      if (/sol(utio)?n/.test(termAt(board, i).text)) board.marks.unnamedSolution = true;
+      if (isCue(board, i, 'solution-name')) board.marks.unnamedSolution = true;
       claim(board, i, i);
       if (strength && strength.percent <= 25)
         find(board, 'strength_percent', strength.percent, 'labelled', strength.from, strength.to);

@@ -1,8 +1,7 @@
 import type { Board } from '../board.ts';
 import { figureAt, find, isCue, isFree, isMark, refuse, termAt } from '../board.ts';
 
-const isPercent = (board: Board, i: number): boolean =>
-  isMark(board, i, '%') || board.terms[i]?.text === 'percent' || board.terms[i]?.text === 'pct';
+const isPercent = (board: Board, i: number): boolean => isMark(board, i, '%') || isCue(board, i, 'percent');
 
 const SHARES = [
   ['third', 1 / 3],
@@ -32,8 +31,7 @@ function findShareAt(board: Board, value: number, from: number, to: number): boo
 
 function findPercentAt(board: Board, i: number): boolean {
   const { value } = figureAt(board, i);
-  const plus =
-    isMark(board, i - 1, '+') || (isCue(board, i - 1, 'and') && board.terms[i - 1]?.text === 'plus');
+  const plus = isMark(board, i - 1, '+') || isCue(board, i - 1, 'plus');
   const after = isPercent(board, i + 1) && isCue(board, i + 2, 'extra') ? i + 2 : undefined;
   const colon = isMark(board, i - 1, ':') || isMark(board, i - 1, '=') ? i - 2 : i - 1;
   const before = isCue(board, colon, 'binding');

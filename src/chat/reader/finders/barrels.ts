@@ -14,7 +14,7 @@ const SIZE_UNITS: readonly UnitId[] = ['L', 'gal', 'galUS', 'galUK', 'hL'];
 
 const isBarrel = (board: Board, i: number): boolean => hasTag(board, i, 'vessel:barrel');
 const isTimes = (board: Board, i: number): boolean =>
-  isMark(board, i, '×') || board.terms[i]?.text === 'x' || isMark(board, i, '*');
+  isMark(board, i, '×') || isCue(board, i, 'times') || isMark(board, i, '*');
 
 /** Litres in one of a unit, gallons as the chat has them. */
 export function litresOf(board: Board, unit: UnitId): number {

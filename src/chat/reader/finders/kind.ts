@@ -8,11 +8,10 @@ const PRODUCTS: readonly Product[] = ['cider', 'mead', 'fruit-wine'];
 
 /** `rose to 3.6` is a verb, `sample port` a tap. */
 function isOtherwise(board: Board, i: number): boolean {
-  const { text } = termAt(board, i);
-  if (text === 'rose')
+  if (isCue(board, i, 'rises-too'))
     return isCue(board, i + 1, 'to') || isCue(board, i + 1, 'by') || isCue(board, i + 1, 'from');
   return (
-    text === 'port' &&
+    isCue(board, i, 'tap-too') &&
     (isCue(board, i - 1, 'lot') || isCue(board, i - 1, 'vessel-statement') || isCue(board, i - 1, 'article'))
   );
 }

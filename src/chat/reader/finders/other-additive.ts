@@ -43,8 +43,7 @@ export function findOtherAdditive(board: Board): void {
   if (named) return;
   const anywhere = board.terms.findIndex((_, i) => isNone(i));
   if (anywhere < 0) return;
-  const isWick =
-    /wick|stick|disc|strip|candle/.test(termAt(board, anywhere).text) && isFound(board, 'vessel');
+  const isWick = isCue(board, anywhere, 'wick') && isFound(board, 'vessel');
   const counted = isWick || board.terms[anywhere - 1]?.kind === 'number';
   const wanted =
     counted ||

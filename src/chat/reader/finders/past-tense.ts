@@ -8,8 +8,7 @@ function cueBetween(board: Board, from: number, to: number, cue: 'not' | 'if' | 
 }
 
 /** `no sulfites added`. */
-const saysNo = (board: Board, i: number): boolean =>
-  [i - 1, i - 2, i - 3].some((k) => board.terms[k]?.text === 'no');
+const saysNo = (board: Board, i: number): boolean => [i - 1, i - 2, i - 3].some((k) => isCue(board, k, 'no'));
 
 /** `didn't add`, `do not add`: the negation stands right before the verb. */
 const declines = (board: Board, i: number): boolean =>

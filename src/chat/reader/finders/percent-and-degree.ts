@@ -1,9 +1,8 @@
 import { celsiusFrom } from '../../../core/units/temperature.ts';
 import type { Board } from '../board.ts';
-import { figureAt, find, hasTag, isFree, isMark, refuse, termAt } from '../board.ts';
+import { figureAt, find, hasTag, isCue, isFree, isMark, refuse, termAt } from '../board.ts';
 
-const isPercent = (board: Board, i: number): boolean =>
-  isMark(board, i, '%') || ['percent', 'pct'].includes(board.terms[i]?.text ?? '');
+const isPercent = (board: Board, i: number): boolean => isMark(board, i, '%') || isCue(board, i, 'percent');
 
 const unitOf = (board: Board, i: number): 'C' | 'F' | undefined =>
   hasTag(board, i, 'unit:C') ? 'C' : hasTag(board, i, 'unit:F') ? 'F' : undefined;

@@ -58,8 +58,7 @@ function findPerBarrel(board: Board, i: number, unit: UnitAt): void {
 function findRateAt(board: Board, i: number): void {
   const unit = unitAt(board, i + 1, MASSES);
   if (!unit || concentrationAt(board, i + 1)) return;
-  if (isCue(board, unit.to + 1, 'each') && /barrel|bbl/.test(termAt(board, unit.to + 1).text))
-    return findPerBarrel(board, i, unit);
+  if (isCue(board, unit.to + 1, 'per-barrel')) return findPerBarrel(board, i, unit);
   const per = perAfter(board, unit.to + 1);
   const base = per === undefined ? undefined : baseAt(board, per + 1);
   if (per === undefined || base === undefined) return;

@@ -43,7 +43,7 @@ function sizeNear(board: Board, i: number): { mass_g: number; from: number; to: 
 const skipTimes = (board: Board, i: number): number =>
   isMark(board, i, '×') ||
   isMark(board, i, '*') ||
-  board.terms[i]?.text === 'x' ||
+  isCue(board, i, 'times') ||
   isCue(board, i, 'effervescent') ||
   hasTag(board, i, 'label:so2')
     ? i - 1
@@ -60,7 +60,7 @@ function findCampden(board: Board, i: number): void {
   const size = sizeNear(board, i);
   const count =
     countBefore(board, i - 1) ?? (size && size.from < i ? countBefore(board, size.from - 1) : undefined);
-  const after = isFree(board, i + 2) && board.terms[i + 1]?.text === 'x' ? i + 2 : undefined;
+  const after = isFree(board, i + 2) && isCue(board, i + 1, 'times') ? i + 2 : undefined;
   const salt = saltNear(board, i);
   if (salt) find(board, 'additive', salt, 'labelled', i, i);
   claim(board, i, i);

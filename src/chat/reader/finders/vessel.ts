@@ -56,8 +56,7 @@ function worded(board: Board, i: number): Named | undefined {
     k++;
   if (k > i + 3) return undefined;
   if (isWholeAt(board, k) && !hasOwnUnit(board, k)) {
-    if (isMark(board, k + 1, 'x') || board.terms[k + 1]?.text === 'x' || isMark(board, k + 1, '×'))
-      return undefined;
+    if (isCue(board, k + 1, 'times') || isMark(board, k + 1, '×')) return undefined;
     const { letter, to } = suffix(board, k);
     const number = Number(termAt(board, k).text);
     return { name: `${kind} ${number}${letter}`, kind, ...(letter ? {} : { number }), from: i, to };
@@ -99,7 +98,7 @@ function coded(board: Board, i: number): Named | undefined {
     word.text !== 'b'
   )
     return undefined;
-  if (word.text === 'x' || (hasOwnUnit(board, k) && !glued)) return undefined;
+  if (isCue(board, i, 'times') || (hasOwnUnit(board, k) && !glued)) return undefined;
   if (glued && !hyphen && single && hasOwnUnit(board, k) && isMark(board, k + 1, '/')) return undefined;
   const { letter, to } = suffix(board, k);
   const number = Number(termAt(board, k).text);

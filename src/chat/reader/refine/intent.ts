@@ -1,7 +1,7 @@
 import type { Board } from '../board.ts';
-import { findingOf, holdsCue, isCue, isFound, isMark, termAt } from '../board.ts';
+import { findingOf, holdsCue, isCue, isFound, isMark } from '../board.ts';
 import type { Intent } from '../understood.ts';
-import { isCellarTalk } from './unlabelled.ts';
+import { isCellarTalk } from '../cellar-talk.ts';
 
 const any = (board: Board, ...fields: readonly Parameters<typeof isFound>[1][]): boolean =>
   fields.some((field) => isFound(board, field));
@@ -76,26 +76,18 @@ function isEffect(board: Board): boolean {
 
 /** A question for an amount that names an additive or a vessel alone. */
 function asksForDose(board: Board): boolean {
-  const isAboutStock = ['left', 'stock', 'store', 'shelf', 'remaining', 'cost', 'costs'].some((word) =>
-    board.terms.some(({ text }) => text === word),
-  );
-  if (isAboutStock) return false;
+  if (holdsCue(board, 'in-store')) return false;
   if (holdsCue(board, 'how-much'))
     return hasAdditive(board) || (hasVessel(board) && board.terms.length <= 12);
   const asked =
     isMark(board, board.terms.length - 1, '?') ||
-    board.terms.some(
-      (_, i) =>
-        isCue(board, i, 'in') &&
-        ['for', 'in', 'into', 'to'].includes(termAt(board, i).text) &&
-        board.taken[i + 1] === true,
-    );
+    board.terms.some((_, i) => isCue(board, i, 'into') && board.taken[i + 1] === true);
   return hasAdditive(board) && hasVessel(board) && asked && !holdsCue(board, 'question');
 }
 
 /** `eyes on T4 please`: a vessel and a please, with no other business. */
 const isBarePlea = (board: Board): boolean =>
-  ['please', 'pls', 'plz', 'plse'].some((word) => board.terms.some(({ text }) => text === word)) &&
+  holdsCue(board, 'please') &&
   board.terms.length <= 6 &&
   !holdsCue(board, 'vessel-statement') &&
   !holdsCue(board, 'question') &&

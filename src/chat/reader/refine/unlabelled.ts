@@ -12,6 +12,7 @@ import {
   setAside,
   termAt,
 } from '../board.ts';
+import { isCellarTalk } from '../cellar-talk.ts';
 import { concentrationAt, mg_L_IN } from '../units.ts';
 
 /** A figure without the word free is free SO2 up to this; above it may be total (mg/L). */
@@ -54,8 +55,7 @@ const isAfterArticle = (board: Board, i: number): boolean =>
 
 /** `at 3.30` may be the clock. */
 const isTimeLike = (board: Board, i: number): boolean =>
-  /^\d\.[0-5]\d$/.test(termAt(board, i).text) &&
-  ['at', 'by', 'until', 'till', 'from', 'since', 'before', 'after'].includes(board.terms[i - 1]?.text ?? '');
+  /^\d\.[0-5]\d$/.test(termAt(board, i).text) && isCue(board, i - 1, 'clock-before');
 
 function findPh(board: Board, candidates: readonly number[]): void {
   const likely = candidates.filter((i) => isPhLike(board, i) && concentrationAt(board, i + 1) === undefined);
@@ -119,19 +119,6 @@ function findFree(board: Board, candidates: readonly number[]): void {
         figureAt(board, i).from,
         rangeEnd(board, i) ?? concentrationAt(board, i + 1)?.to ?? i,
       );
-}
-
-const CELLAR =
-  /^(label|unit:(?!none|C|F|degree)|additive|style|category|product|stage|vessel|organic|cue:(cellar|variety|molecular|target|wine|ml)$)/;
-
-/** Whether the message speaks of wine at all: a cellar word, a unit, or nothing but numbers. */
-export function isCellarTalk(board: Board): boolean {
-  const words = board.terms.filter((term) => term.kind === 'word');
-  if (words.length === 0) return board.terms.some((term) => term.kind === 'number');
-  return (
-    board.findings.length > 0 ||
-    board.terms.some((term) => term.kind === 'word' && term.tags.some((tag) => CELLAR.test(tag)))
-  );
 }
 
 /** How many ordinary words a message may hold beside bare figures and still be a reading. */

@@ -26,7 +26,9 @@ export type CueId =
   | 'thousand' | 'number-word' | 'number-sign' | 'bottle-unit' | 'tablet' | 'sachet' | 'effervescent' | 'joined'
   | 'ml' | 'ml-around' | 'ml-over' | 'ml-without' | 'ml-bugs' | 'over' | 'stop' | 'ferment' | 'past-ferment'
   | 'fruit' | 'wine' | 'verb' | 'pronoun' | 'time-before' | 'month' | 'lot' | 'variety'
-  | 'greeting' | 'thanks' | 'help' | 'cellar' | 'plain' | 'potassium' | 'sodium' | 'yet'; // prettier-ignore
+  | 'greeting' | 'thanks' | 'help' | 'cellar' | 'plain' | 'potassium' | 'sodium' | 'yet'
+  | 'percent' | 'please' | 'in-store' | 'into' | 'clock-before' | 'no' | 'states' | 'plus' | 'times' | 'wick'
+  | 'in-water-name' | 'solution-name' | 'per-barrel' | 'rises-too' | 'tap-too'; // prettier-ignore
 
 /** What a word is. */
 export type Tag =

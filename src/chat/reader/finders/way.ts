@@ -1,0 +1,50 @@
+import type { Board } from '../board.ts';
+import { find, isCue, isFree, isMark, refuse } from '../board.ts';
+import { MOST_BARE_MOLECULAR_mg_L, aimAt, isArrow, keepTarget, kindAt, skipJoins } from './aim.ts';
+
+/** A step of less than this between two figures may be a range, not a way from one to the other. */
+const SMALLEST_CLEAR_STEP_mg_L = 5;
+
+/** `from 18 to 32`, `free 18 to 32`, `18 -> 32`: where it is and where it should go. */
+function findWayAt(board: Board, i: number): boolean {
+  const first = aimAt(board, i);
+  if (!first || first.kind === 'molecular' || first.kind === 'ph') return false;
+  const joint = first.to + 1;
+  const arrow = isArrow(board, joint);
+  if (!arrow && !isCue(board, joint, 'to')) return false;
+  const second = aimAt(board, skipJoins(board, joint + 1));
+  if (!second) return false;
+  const labelAt =
+    isMark(board, i - 1, ':') || isMark(board, i - 1, '=') || isCue(board, i - 1, 'is') ? i - 2 : i - 1;
+  const before = kindAt(board, labelAt);
+  if (before === 'ph' || before === 'molecular') {
+    refuse(board, 'ambiguous-number', i, second.to);
+    return true;
+  }
+  const said = isCue(board, i - 1, 'from') || isCue(board, labelAt - 1, 'from');
+  const start = isCue(board, i - 1, 'from') ? i - 1 : before ? labelAt : i;
+  if (second.kind === 'molecular') {
+    find(board, 'free_mg_L', first.mg_L, 'labelled', start, first.to);
+    keepTarget(board, second, joint);
+    return true;
+  }
+  if (
+    before === 'total' ||
+    second.kind === 'total' ||
+    (!arrow &&
+      !said &&
+      Math.abs(second.mg_L - first.mg_L) < SMALLEST_CLEAR_STEP_mg_L &&
+      second.mg_L > MOST_BARE_MOLECULAR_mg_L)
+  ) {
+    refuse(board, 'ambiguous-number', i, second.to);
+    return true;
+  }
+  find(board, 'free_mg_L', first.mg_L, 'labelled', start, first.to);
+  keepTarget(board, second, joint);
+  return true;
+}
+
+/** Finds where free SO2 is and where it should go, in one breath: `from 18 to 32`, `free 18 to 32`, `18 -> 32`. */
+export function findWay(board: Board): void {
+  for (let i = 0; i < board.terms.length; i++) if (isFree(board, i)) findWayAt(board, i);
+}
