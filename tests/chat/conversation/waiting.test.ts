@@ -142,6 +142,12 @@ test.each([
   expect(waitsFor({ ...READING, fields, asks })).toBe(field);
 });
 
+test('a number with a plus is what is to be added, also where a target is asked', () => {
+  const talk = startTalk();
+  talk.write('port 20 hl pH 3.6 free 12');
+  expect(talk.write('+25').understood?.readings[0]?.fields.target).toEqual({ add_mg_L: 25 });
+});
+
 test('while another target is asked a bare number is the target, though buttons stand above', () => {
   const talk = startTalk();
   talk.write('T4 40 hl pH 3.5 free 20');
