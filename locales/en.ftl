@@ -371,6 +371,7 @@ unreadable =
         [file] I cannot read files yet. Please type the figures.
        *[other] I only read text. Please type the figures.
     }
+fault = That failed on my side, and nothing was worked out. Please send it once more; if it fails again, tell whoever runs me.
 old-button = That button is from an older message. Please send the reading again.
 
 ## An emergency

@@ -5,6 +5,8 @@ import { EXIT, OperatorError } from './operator-error.ts';
 export interface Operator {
   /** Shows a sentence. */
   readonly tell: (sentence: string) => void;
+  /** Shows a fault of the program's own with its trace; the program goes on. */
+  readonly report: (fault: unknown) => void;
   /** Ends the process: with the sentence and status of an OperatorError, else with the trace of the fault. */
   readonly end: (error: unknown) => never;
 }
@@ -15,6 +17,7 @@ export function createOperator(secret: string | undefined): Operator {
   const tell = (sentence: string): void => void process.stderr.write(`${hide(sentence)}\n`);
   return {
     tell,
+    report: (fault) => tell(`A message could not be answered.\n${traceOf(fault)}`),
     end: (error) => {
       if (error instanceof OperatorError) {
         tell(error.message);

@@ -36,7 +36,15 @@ export async function start(): Promise<void> {
     const { runTerminal } = await import('./terminal/chat.ts');
     const { stdin: input, stdout: output } = process;
     const interactive = input.isTTY && output.isTTY;
-    await runTerminal({ ...conversation, input, output, now: clock.now, language: 'en', interactive });
+    await runTerminal({
+      ...conversation,
+      input,
+      output,
+      now: clock.now,
+      language: 'en',
+      interactive,
+      report: operator.report,
+    });
   } else {
     const { createLog } = await import('./logging.ts');
     const { serveTelegram } = await import('./telegram/serve-telegram.ts');

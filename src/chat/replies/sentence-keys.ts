@@ -128,6 +128,7 @@ export interface SentenceValues {
   'fact-total': 'total';
   'fact-volume': 'volume';
   'fact-volume-count': 'count' | 'volume';
+  fault: never;
   'ferment-stop': 'adds';
   'ferment-stop-more': never;
   folded: never;

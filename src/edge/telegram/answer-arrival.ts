@@ -1,4 +1,5 @@
 import type { Handled, IncomingMessage, StatePort } from '../../chat/conversation/ports.ts';
+import { faultReply } from '../../chat/conversation/fault-reply.ts';
 import type { Memory } from '../../chat/conversation/memory.ts';
 import type { Say } from '../../chat/replies/say.ts';
 import type { Clock } from '../clock.ts';
@@ -46,7 +47,8 @@ export async function answerArrival(arrival: Arrival, options: AnswerOptions): P
     return sent === 'ended';
   } catch (error) {
     log.error({ err: error, update: updateId }, 'a message could not be answered');
-    return true;
+    const sorry = [say(faultReply(message.language))];
+    return (await sendReplies(chatId, sorry, { api: platform.patient, log, signal })) === 'ended';
   }
 }
 

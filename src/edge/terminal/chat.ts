@@ -1,4 +1,5 @@
 import type { Handled, IncomingMessage, StatePort } from '../../chat/conversation/ports.ts';
+import { faultReply } from '../../chat/conversation/fault-reply.ts';
 import type { Memory } from '../../chat/conversation/memory.ts';
 import type { Language } from '../../chat/reader/understood.ts';
 import type { Reply } from '../../chat/replies/reply.ts';
@@ -15,6 +16,8 @@ export interface TerminalOptions {
   /** The time in milliseconds since 1970. */
   readonly now: () => number;
   readonly language: Language;
+  /** Tells whoever runs the program of a fault of its own. */
+  readonly report: (fault: unknown) => void;
   /** Whether a person sits there: then there is a greeting and a prompt. */
   readonly interactive: boolean;
   /** Ends the chat. */
@@ -53,7 +56,7 @@ export async function runTerminal(options: TerminalOptions): Promise<void> {
 }
 
 async function answer(text: string, count: number, options: TerminalOptions): Promise<Said[]> {
-  const { handle, state, say, now, language } = options;
+  const { handle, state, say, now, language, report } = options;
   const message: IncomingMessage = {
     cellar: 'terminal',
     chat: 'terminal',
@@ -63,9 +66,15 @@ async function answer(text: string, count: number, options: TerminalOptions): Pr
     language,
     content: { kind: 'text', text },
   };
-  const { writes, replies } = handle(message, await state.load(message));
-  await state.commit(writes);
-  return replies.map(say);
+  try {
+    const { writes, replies } = handle(message, await state.load(message));
+    const said = replies.map(say);
+    await state.commit(writes);
+    return said;
+  } catch (error) {
+    report(error);
+    return [say(faultReply(language))];
+  }
 }
 
 /** The text, and under it the buttons that a number presses; choices with letters stand in the text already. */

@@ -30,7 +30,7 @@ export function handle(message: IncomingMessage, memory: Memory): Handled {
 /** Says such a reply. */
 export function say({ lines, buttons }: Reply): Said {
   return {
-    text: lines.map((line) => line.values['text'] ?? '').join('\n'),
+    text: lines.map((line) => line.values['text'] ?? line.key).join('\n'),
     buttons: buttons.map(({ key, mark, label }) => ({ key, mark, label })),
   };
 }

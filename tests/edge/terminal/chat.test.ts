@@ -5,22 +5,35 @@ import { DEFAULT_SETTINGS } from '../../../src/chat/conversation/settings.ts';
 import { makeSay } from '../../../src/chat/replies/say.ts';
 import { loadLocales } from '../../../src/edge/locales.ts';
 import { createMemoryStore } from '../../../src/edge/store/memory.ts';
-import { runTerminal } from '../../../src/edge/terminal/chat.ts';
+import { runTerminal, type TerminalOptions } from '../../../src/edge/terminal/chat.ts';
 
 const say = makeSay(loadLocales());
 const NOON = Date.parse('2026-10-05T12:00:00Z');
 
+const fail = (fault: unknown): never => {
+  throw fault;
+};
+
 interface Typed {
   readonly interactive?: boolean;
+  readonly handle?: TerminalOptions['handle'];
+  readonly report?: (fault: unknown) => void;
   /** Written one after the other, with a pause between them that is longer than any paste. */
   readonly pieces: readonly string[];
 }
 
-async function chat({ interactive = false, pieces }: Typed): Promise<string> {
+const usual: TerminalOptions['handle'] = (message, memory) => handle(message, memory, DEFAULT_SETTINGS);
+
+async function chat({
+  interactive = false,
+  pieces,
+  handle: handled = usual,
+  report = fail,
+}: Typed): Promise<string> {
   const input = new PassThrough();
   const output = new PassThrough({ encoding: 'utf8' });
   const ended = runTerminal({
-    handle: (message, memory) => handle(message, memory, DEFAULT_SETTINGS),
+    handle: handled,
     say,
     state: createMemoryStore(),
     input,
@@ -28,6 +41,7 @@ async function chat({ interactive = false, pieces }: Typed): Promise<string> {
     now: () => NOON,
     language: 'en',
     interactive,
+    report,
   });
   for (const [at, piece] of pieces.entries()) {
     if (at > 0) await new Promise((resolve) => setTimeout(resolve, interactive ? 80 : 400));
@@ -90,7 +104,7 @@ test('the chat ends when it is told to', async () => {
   const stop = new AbortController();
   const input = new PassThrough();
   const ended = runTerminal({
-    handle: (message, memory) => handle(message, memory, DEFAULT_SETTINGS),
+    handle: usual,
     say,
     state: createMemoryStore(),
     input,
@@ -98,8 +112,25 @@ test('the chat ends when it is told to', async () => {
     now: () => NOON,
     language: 'en',
     interactive: false,
+    report: fail,
     signal: stop.signal,
   });
   stop.abort();
   await expect(ended).resolves.toBeUndefined();
+});
+
+test('a fault of ours costs one answer, not the chat, and whoever runs it is told', async () => {
+  const reported: unknown[] = [];
+  const broken = new RangeError('planted');
+  const text = await chat({
+    handle: (message, memory) => {
+      if (message.content.kind === 'text' && message.content.text.includes('T4')) throw broken;
+      return usual(message, memory);
+    },
+    report: (fault) => reported.push(fault),
+    pieces: ['T4 20 hl pH 3.4 free 15\n\n', 'thanks\n'],
+  });
+  expect(text).toMatch(/^That failed on my side, and nothing was worked out/);
+  expect(text).toContain('You are welcome');
+  expect(reported).toEqual([broken]);
 });
