@@ -37,11 +37,10 @@ export function handleText(
   const button = /^\d{1,2}$/.test(mark) ? memory.lastButtons[Number(mark) - 1] : undefined;
   if (!waiting && button !== undefined) return handlePress(message, button, memory, settings);
   // A number can be no answer to a question for a name: it is neither a choice nor a reading of its own.
-  // With a plus it says by itself what it is: so much to add, and not the target that was asked for.
   const understood =
     waiting?.field === 'additive' && isBareNumber(mark)
       ? numberAskedAbout(mark, settings, memory.decimalMark)
-      : readMessage(text, settings, mark.startsWith('+') ? undefined : waiting);
+      : readMessage(text, settings, waiting);
   if (understood.readings.length === 1)
     return answerSingle(message, checked(completed(understood, waiting, settings)), memory, settings);
   return answerRound(message, checked(understood), memory, settings);

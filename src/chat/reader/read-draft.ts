@@ -70,10 +70,11 @@ const FINDERS: readonly Finder[] = [
 function shareVolume(board: Board, fields: Record<string, unknown>): void {
   const vessels = findingOf(board, 'vessels')?.value;
   if (vessels === undefined) return;
-  const volume = findingOf(board, 'volume_L')?.value;
+  const place = findingOf(board, 'volume_L');
+  const volume = place?.value;
   const isWorded = vessels[0]?.startsWith('barrel ') === true;
   const isBarrels = isWorded || /^B\d/.test(vessels[0] ?? '');
-  if (volume === undefined) {
+  if (place === undefined || volume === undefined) {
     if (isWorded) {
       board.marks.barrelsAssumed_L = vessels.length * USUAL_BARREL_L;
       board.marks.barrelsCounted = true;
@@ -85,11 +86,10 @@ function shareVolume(board: Board, fields: Record<string, unknown>): void {
       (isBarrels && volume <= 700 && !holdsCue(board, 'altogether')))
   ) {
     fields['volume_L'] = volume * vessels.length;
-    board.notes.push({ id: 'each-or-total', text: `${volume} L` });
+    board.notes.push({ id: 'each-or-total', text: placeOf(board, place.from, place.to).text });
   } else if (!board.marks.statedTotal && !holdsCue(board, 'altogether')) {
     delete fields['volume_L'];
     board.marks.eachOrTotal = true;
-    const place = findingOf(board, 'volume_L') ?? { from: 0, to: 0 };
     board.problems.push({ code: 'ambiguous-number', about: placeOf(board, place.from, place.to).text });
     board.notes.push({ id: 'each-or-total', text: '' });
   }

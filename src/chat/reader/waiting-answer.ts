@@ -50,7 +50,8 @@ export function readWaiting(
   settings: ReaderSettings,
 ): Reading | undefined {
   const match = bare.exec(text);
-  if (!match) return undefined;
+  // With a plus it says by itself what it is: so much to add.
+  if (!match || match[1] === '+') return undefined;
   const raw = match[2] ?? '';
   const numeral =
     waiting.field === 'ph'
