@@ -86,7 +86,8 @@ function shareVolume(board: Board, fields: Record<string, unknown>): void {
       (isBarrels && volume <= 700 && !holdsCue(board, 'altogether')))
   ) {
     fields['volume_L'] = volume * vessels.length;
-    board.notes.push({ id: 'each-or-total', text: placeOf(board, place.from, place.to).text });
+    if (!board.marks.statedEach && !holdsCue(board, 'each'))
+      board.notes.push({ id: 'each-or-total', text: placeOf(board, place.from, place.to).text });
   } else if (!board.marks.statedTotal && !holdsCue(board, 'altogether')) {
     delete fields['volume_L'];
     board.marks.eachOrTotal = true;

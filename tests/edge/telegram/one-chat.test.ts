@@ -49,7 +49,7 @@ describe('what goes wrong in one chat', () => {
 
   test('no answer is sent when what has to be kept could not be kept, only that it failed', async () => {
     await using scene = await openScene();
-    const { api, rosa, serve } = scene;
+    const { rosa, serve } = scene;
     const store = createMemoryStore();
     let full = true;
     serve({
