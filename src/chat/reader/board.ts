@@ -117,6 +117,16 @@ export const isFound = (board: Board, field: FieldName): boolean =>
 export const findingOf = <F extends FieldName>(board: Board, field: F): Finding<F> | undefined =>
   board.findings.find((finding) => finding.field === field) as Finding<F> | undefined;
 
+/** Whether a label before figure `i` claims it: `free 12 tablets` is free SO2, and no twelve tablets. */
+export function isLabelled(board: Board, i: number): boolean {
+  let k = i - 1;
+  while (isMark(board, k, ':') || isMark(board, k, '=') || (isCue(board, k, 'is') && !isLabel(board, k))) k--;
+  return isLabel(board, k);
+}
+
+const isLabel = (board: Board, i: number): boolean =>
+  board.terms[i]?.tags.some((tag) => tag.startsWith('label:') && tag !== 'label:volume') === true;
+
 /** A figure with its sign and whether it could be off by a thousand. */
 export interface Figure {
   readonly value: number;

@@ -15,7 +15,7 @@ export const MASS_UNITS: readonly UnitId[] = ['g', 'mg', 'kg', 'lb', 'oz', 'ton'
 
 /** The unit word at term `i`, among those asked for. */
 export function unitWordAt(board: Board, i: number, among: readonly UnitId[]): UnitId | undefined {
-  if (board.terms[i]?.kind !== 'word') return undefined;
+  if (board.terms[i]?.kind !== 'word' || board.taken[i] === true) return undefined;
   return among.find((id) => hasTag(board, i, `unit:${id}`));
 }
 

@@ -1,5 +1,5 @@
 import type { Board } from '../board.ts';
-import { figureAt, find, findingOf, hasTag, holdsCue, isCue, isFree, refuse } from '../board.ts';
+import { figureAt, find, findingOf, hasTag, holdsCue, isCue, isFree, refuse, isLabelled } from '../board.ts';
 import type { UnitId } from '../words/words.ts';
 import { VOLUME_UNITS, unitAt } from '../units.ts';
 import { litresOf } from './barrels.ts';
@@ -46,7 +46,7 @@ function isOfAdditive(board: Board, i: number, unit: UnitId, to: number, volumes
 export function findAdditiveVolume(board: Board): void {
   const volumes = volumesIn(board);
   for (let i = 0; i < board.terms.length; i++) {
-    const unit = isFree(board, i) ? unitAt(board, i + 1, VOLUME_UNITS) : undefined;
+    const unit = isFree(board, i) && !isLabelled(board, i) ? unitAt(board, i + 1, VOLUME_UNITS) : undefined;
     if (!unit || !isOfAdditive(board, i, unit.id, unit.to, volumes)) continue;
     const { value, unsure, from } = figureAt(board, i);
     if (unsure) refuse(board, 'ambiguous-number', i, unit.to);

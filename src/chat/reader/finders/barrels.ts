@@ -109,10 +109,39 @@ function keep(board: Board, count: number, volume_L: number, from: number, to: n
   return true;
 }
 
+/** `2 tanks of 40 hl each`; without "each" or "in all" nobody knows. */
+function findTanks(board: Board, i: number): void {
+  const isTanks = hasTag(board, i + 1, 'vessel:tank') && termAt(board, i + 1).text.endsWith('s');
+  const count = figureAt(board, i).value;
+  if (
+    !isTanks ||
+    board.taken[i + 1] === true ||
+    !Number.isInteger(count) ||
+    count < 2 ||
+    count > MOST_BARRELS
+  )
+    return;
+  let at = i + 2;
+  while (
+    isCue(board, at, 'of') ||
+    isCue(board, at, 'with') ||
+    isMark(board, at, ',') ||
+    isMark(board, at, ':')
+  )
+    at++;
+  const size = sizeAt(board, at, false);
+  if (!size) return;
+  if (isCue(board, size.to + 1, 'each')) keep(board, count, size.volume_L, i, size.to + 1);
+  else if (isCue(board, size.to + 1, 'altogether')) {
+    board.marks.containers = count;
+    find(board, 'volume_L', size.volume_L, 'unit', i, size.to + 1);
+  } else refuse(board, 'ambiguous-number', i, size.to);
+}
+
 /** Finds barrels by number and size. Without a size they are 225 L, said as an assumption. */
 export function findBarrels(board: Board): void {
   for (let i = 0; i < board.terms.length; i++) {
-    if (isFree(board, i)) findCounted(board, i);
+    if (isFree(board, i) && !findCounted(board, i)) findTanks(board, i);
     else if (board.taken[i] !== true && termAt(board, i).kind === 'word') {
       if (isBarrel(board, i) && !isFound(board, 'vessel') && !isFound(board, 'vessels')) {
         const size = sizeAt(board, i + 1, false);

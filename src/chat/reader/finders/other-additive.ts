@@ -1,7 +1,7 @@
 import type { Board } from '../board.ts';
 import { findingOf, hasTag, holdsCue, isCue, isFound, placeOf, refuse, termAt } from '../board.ts';
 
-const CHEMICAL_SLIP = /^(meta)?bi?sul(f|ph)ates?$|metabisul(f|ph)(ate|ide)s?$/;
+const CHEMICAL_SLIP = /^(meta)?(bi)?sul(f|ph)(at|id)es?$/;
 
 /** What may stand between an amount and its additive. */
 const isBetween = (board: Board, i: number): boolean =>
@@ -53,5 +53,7 @@ export function findOtherAdditive(board: Board): void {
     holdsCue(board, 'add') ||
     board.marks.spoon === true;
   const isFigure = isFound(board, 'ph') || isFound(board, 'free_mg_L');
+  const slip = CHEMICAL_SLIP.test(termAt(board, anywhere).text.split(' ').at(-1) ?? '');
+  if (slip && isFigure) return refuseWord(board, anywhere);
   if (wanted && !(isFigure && amount === undefined && !board.pastTense)) refuseWord(board, anywhere);
 }

@@ -29,6 +29,10 @@ function malolacticAt(board: Board, i: number): Stage | undefined {
 /** `must` is juice only as a noun: not in "I must", "must be". */
 function isNounMust(board: Board, i: number): boolean {
   if (board.terms[i]?.text !== 'must') return true;
+  const measured = termAt(board, i - 1).tags.some(
+    (tag) => /^unit:(L|hL|m3|gal)/.test(tag) || tag === 'cue:fruit' || tag === 'cue:of',
+  );
+  if (measured && isCue(board, i + 1, 'add')) return true;
   if (
     isCue(board, i + 1, 'verb') &&
     !isCue(board, i + 1, 'plain') &&

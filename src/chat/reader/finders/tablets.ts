@@ -1,6 +1,6 @@
 import type { AdditiveId } from '../../../core/additives/additive-id.ts';
 import type { Board } from '../board.ts';
-import { claim, figureAt, find, hasTag, isCue, isFree, isMark, refuse } from '../board.ts';
+import { claim, figureAt, find, hasTag, isCue, isFree, isMark, refuse, isLabelled } from '../board.ts';
 import { unitAt } from '../units.ts';
 
 /** Grams of salt above which a plain tablet is no plain tablet. */
@@ -34,7 +34,7 @@ function saltNear(board: Board, i: number): AdditiveId | undefined {
 function sizeNear(board: Board, i: number): { mass_g: number; from: number; to: number } | undefined {
   for (const k of [i - 2, i - 3, i + 1, i + 2, i + 3, i + 4, i - 4]) {
     if (board.terms[k]?.kind === 'break') continue;
-    const unit = isFree(board, k) ? unitAt(board, k + 1, ['g']) : undefined;
+    const unit = isFree(board, k) && !isLabelled(board, k) ? unitAt(board, k + 1, ['g']) : undefined;
     if (unit) return { mass_g: figureAt(board, k).value, from: k, to: unit.to };
   }
   return undefined;
@@ -52,7 +52,7 @@ const skipTimes = (board: Board, i: number): number =>
 /** The number of tablets that ends at term `i`, if one does. */
 function countBefore(board: Board, i: number): number | undefined {
   const k = skipTimes(board, i);
-  return isFree(board, k) && !isMark(board, k - 1, '/') ? k : undefined;
+  return isFree(board, k) && !isMark(board, k - 1, '/') && !isLabelled(board, k) ? k : undefined;
 }
 
 function findCampden(board: Board, i: number): void {

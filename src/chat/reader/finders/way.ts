@@ -17,6 +17,8 @@ function findWayAt(board: Board, i: number): boolean {
   const labelAt =
     isMark(board, i - 1, ':') || isMark(board, i - 1, '=') || isCue(board, i - 1, 'is') ? i - 2 : i - 1;
   const before = kindAt(board, labelAt);
+  // `total 170 to 30 free`: the first figure is its label's own.
+  if (before === 'total' && (second.kind === 'free' || second.kind === 'molecular')) return false;
   if (before === 'ph' || before === 'molecular') {
     refuse(board, 'ambiguous-number', i, second.to);
     return true;

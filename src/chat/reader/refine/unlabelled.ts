@@ -49,6 +49,17 @@ function mayBeVintage(board: Board, i: number): boolean {
 const isAfterInto = (board: Board, i: number): boolean =>
   isCue(board, i - 1, 'in') && !isCue(board, i - 1, 'is');
 
+/** `50 ppm in 12 hl kmbs` may be what is to go in. */
+const mayGoIn = (board: Board, i: number): boolean => {
+  const unit = concentrationAt(board, i + 1);
+  const into = unit !== undefined && isCue(board, unit.to + 1, 'into');
+  return (
+    into &&
+    isFound(board, 'additive') &&
+    board.findings.some(({ field, from }) => field === 'volume_L' && from === unit.to + 2)
+  );
+};
+
 /** An article alone names no tank: `the 4`. */
 const isAfterArticle = (board: Board, i: number): boolean =>
   isCue(board, i - 1, 'article') || isMark(board, i - 1, '#');
@@ -95,7 +106,7 @@ function findFree(board: Board, candidates: readonly number[]): void {
   const figure = only === undefined ? undefined : figureAt(board, only);
   const unit = only === undefined ? undefined : concentrationAt(board, only + 1);
   const fine =
-    only !== undefined && figure !== undefined && !isTaken && rangeEnd(board, only) === undefined && !isAfterInto(board, only) && !isAfterArticle(board, only) &&
+    only !== undefined && figure !== undefined && !isTaken && rangeEnd(board, only) === undefined && !isAfterInto(board, only) && !isAfterArticle(board, only) && !mayGoIn(board, only) &&
     vintage === undefined && !isMark(board, only + 1, '/') && !isMark(board, only - 1, '/') && figure.value <= MOST_UNLABELLED_FREE_mg_L && (isWhole(board, only) || unit !== undefined) && unit?.id !== 'g/L'; // prettier-ignore
   if (fine && figure.value < 0) return refuse(board, 'negative-value', figure.from, only);
   if (fine) {

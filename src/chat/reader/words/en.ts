@@ -532,8 +532,7 @@ export const en: Words = {
       'concentrate', 'percarbonate', 'caustic', 'soda ash', 'peracetic', 'pbw', 'proxycarb', 'k bicarb',
       'bicarb', 'khco3', 'thiosulfate', 'sodium thiosulfate', 'potassium thiosulfate', 'sulfate of potash',
       'kmno4', 'potassium permanganate', 'potassium hydroxide', 'salt', 'dry ice', 'argon', 'nitrogen',
-      'inert gas', 'sulfonate', 'dithionite', 'bleach', 'chlorine',
-    ],
+      'inert gas', 'sulfonate', 'dithionite', 'bleach', 'chlorine', 'sodium sulfite', 'sodium sulphite', 'potassium sulfite', 'potassium sulphite', 'na2so3', 'k2so3', 'calcium sulfite', 'magnesium sulfite'],
   },
   danger: {
     down: [
