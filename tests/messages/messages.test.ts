@@ -1,7 +1,14 @@
 import { describe, expect, test } from 'vitest';
 import { judge, labelledIn } from './judge.ts';
 
-for (const file of ['en.jsonl', 'en-more.jsonl', 'refused.en.jsonl', 'emergency.jsonl']) {
+for (const file of [
+  'en.jsonl',
+  'en-more.jsonl',
+  'en-words.jsonl',
+  'en-marks.jsonl',
+  'refused.en.jsonl',
+  'emergency.jsonl',
+]) {
   describe(`messages of ${file} are read as their labels say`, () => {
     test.each(labelledIn(file))('$id reads as it was meant: $text', (labelled) => {
       const { read, wanted } = judge(labelled);
