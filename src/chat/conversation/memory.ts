@@ -1,4 +1,13 @@
-import type { AskedField, Fields, Reading } from '../reader/understood.ts';
+import type { AskedField, Fields, FieldName, Reading } from '../reader/understood.ts';
+import type { Problem } from '../../core/problem.ts';
+
+/** A figure that was in doubt: the problem stands until one of the fields that settle it is said. */
+export interface Doubt {
+  readonly problems: readonly Problem[];
+  readonly settledBy: readonly FieldName[];
+  /** Whether a bare number settles it; not where the doubt is which figure it is. */
+  readonly byBareNumber: boolean;
+}
 
 /** A question the bot has asked and still waits for. */
 export interface Waiting {
@@ -9,6 +18,8 @@ export interface Waiting {
   readonly askedAt: number;
   /** Choices of that field carry letters: `a` → the fields it stands for. */
   readonly letters: Readonly<Record<string, Fields>>;
+  /** What is in doubt, where it is asked for because of a problem. */
+  readonly doubt?: Doubt;
 }
 
 /** A reading that a button of an earlier reply refers to. */
@@ -26,12 +37,14 @@ export interface Memory {
   /** Button keys of the last reply in order, so that `2` on a keyboard presses the second. */
   readonly lastButtons: readonly string[];
   /**
-   * When the bot asked how many mg/L at a stage where nothing may wait for the answer: a bare number
-   * that follows is asked about, never taken.
+   * The reading for which the bot asked how many mg/L at a stage where nothing may wait for the answer: a bare number
+   * or addition that follows is asked about, never taken.
    */
-  readonly askedTargetAt?: number;
+  readonly askedTarget?: { readonly at: number; readonly reading: Reading };
   /** The decimal mark that this person wrote with last; a press has none of its own. */
   readonly decimalMark?: '.' | ',';
+  /** The unit of concentration that this person wrote last. */
+  readonly concentrationUnit?: Reading['concentrationUnit'];
   /** The day (UTC date) on which this person last got an additive's cautions in full. */
   readonly cautionedOn: Readonly<Record<string, string>>;
 }

@@ -221,6 +221,7 @@ export interface SentenceValues {
   'step-solution-strength-by-salt': never;
   'step-tablets-by-salt': never;
   'step-tablets-by-so2': never;
+  'step-volume-in-litres': never;
   take: 'vessel';
   target: 'kind' | 'value';
   'target-of': 'vessel';

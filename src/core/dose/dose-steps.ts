@@ -14,8 +14,8 @@ import {
   number,
   pKLine,
   remainderTerm,
-  volumeTerm,
 } from './terms.ts';
+import { MG_PER_G, volumeInLitres } from './volume-in-litres.ts';
 
 /** What a dose's working is made from. */
 export interface DoseWork {
@@ -95,10 +95,11 @@ function amountLines(work: DoseWork, dose: Term, made: Made, digits: number): vo
   const { request, content } = work;
   if (content === undefined || request.volume_L === undefined) return;
   const count = request.vessels ?? 1;
-  const all = volumeTerm(request.volume_L, request.volume_display, digits);
+  const { volume: all, lines } = volumeInLitres(request.volume_L, request.volume_display, digits);
   const volume = count > 1 ? over(all, number(count, digits)) : all;
-  const SO2 = line(count > 1 ? 'so2-mass-each' : 'so2-mass', times(dose, volume), 'g', digits);
-  made.lines.push(SO2);
+  const SO2_g = over(times(dose, volume), MG_PER_G);
+  const SO2 = line(count > 1 ? 'so2-mass-each' : 'so2-mass', SO2_g, 'g', digits);
+  made.lines.push(...lines, SO2);
   const [name, unit] = AMOUNT_LINES[content.of];
   const inOne = contentTerm(content, digits);
   let last = SO2;
@@ -142,7 +143,7 @@ function isRight(work: DoseWork, made: Made): boolean {
  *   dissociation: { pK: 1.81, basis: 'pk-1.81', source: 'uc-1982' },
  *   aim: { add_mg_L: 28, dose_mg_L: 28 },
  *   content: { of: 'SO2-solution', per: 'mL', SO2_g_per_100_mL: 6 },
- * }).map((step) => step.substituted) // => ['28 mg/L * 1000 L', '28 g / (6 g / (100 mL))']
+ * }).map((step) => step.substituted) // => ['28 mg/L * 1000 L / (1000 mg/g)', '28 g / (6 g / (100 mL))']
  * ```
  */
 export function doseSteps(work: DoseWork): readonly Step[] {

@@ -5,7 +5,8 @@ import { shown } from '../units/shown.ts';
 import { over, plus, times, type Step, type Term } from '../working.ts';
 import { line, printAlike, withEnoughDigits, type Line } from './line.ts';
 import type { AddedRequest, WineFacts } from './request.ts';
-import { contentTerm, freeToMolecularTerm, number, pKLine, volumeTerm } from './terms.ts';
+import { contentTerm, freeToMolecularTerm, number, pKLine } from './terms.ts';
+import { MG_PER_G, volumeInLitres } from './volume-in-litres.ts';
 
 /** What the working of an amount that is given is made from. */
 export interface EffectWork {
@@ -35,14 +36,16 @@ function amountTerm(request: AddedRequest, digits: number): Term | undefined {
   return request.tablets === undefined ? undefined : number(request.tablets, digits);
 }
 
-function SO2Line(work: EffectWork, digits: number): Line | undefined {
+/** The SO2 in the amount, with the line that finds it; a mass of effervescent tablets, and of the gas, is SO2 already. */
+function SO2Of(work: EffectWork, digits: number): { SO2?: Term; lines: Line[] } {
   const { request, content } = work;
   const amount = amountTerm(request, digits);
-  if (amount === undefined || content === undefined) return undefined;
+  if (amount === undefined || content === undefined) return { lines: [] };
   const inOne = contentTerm(content, digits);
-  // A mass of effervescent tablets, and of the gas, is SO2 already.
-  const isSO2 = inOne === undefined || (request.mass_g !== undefined && content.of === 'SO2-tablet');
-  return line('so2-in-amount', isSO2 ? amount : times(amount, inOne), 'g', digits, SOURCE_OF[content.of]);
+  if (inOne === undefined || (request.mass_g !== undefined && content.of === 'SO2-tablet'))
+    return { SO2: amount, lines: [] };
+  const SO2 = line('so2-in-amount', times(amount, inOne), 'g', digits, SOURCE_OF[content.of]);
+  return { SO2: SO2.result, lines: [SO2] };
 }
 
 function rateLines(work: EffectWork, digits: number): { lines: Line[]; added?: Term } {
@@ -51,8 +54,8 @@ function rateLines(work: EffectWork, digits: number): { lines: Line[]; added?: T
   if (request.rate_mg_L === undefined) return { lines };
   const rate = shown(request.rate_mg_L, 'mg/L', digits);
   if (request.volume_L !== undefined) {
-    const volume = volumeTerm(request.volume_L, request.volume_display, digits);
-    lines.push(line('mass-by-rate', times(rate, volume), 'g', digits));
+    const { volume, lines: found } = volumeInLitres(request.volume_L, request.volume_display, digits);
+    lines.push(...found, line('mass-by-rate', over(times(rate, volume), MG_PER_G), 'g', digits));
   }
   if (content?.per !== 'g' && content?.of !== 'SO2-tablet') return { lines };
   const inOne = content.of === 'SO2-tablet' ? undefined : contentTerm(content, digits);
@@ -68,15 +71,14 @@ function addedLines(work: EffectWork, digits: number): { lines: Line[]; added?: 
   if (request.added_mg_L !== undefined) {
     const added = shown(request.added_mg_L, 'mg/L', digits);
     if (request.volume_L === undefined) return { lines: [], added };
-    const volume = volumeTerm(request.volume_L, request.volume_display, digits);
-    return { lines: [line('so2-mass', times(added, volume), 'g', digits)], added };
+    const { volume, lines } = volumeInLitres(request.volume_L, request.volume_display, digits);
+    return { lines: [...lines, line('so2-mass', over(times(added, volume), MG_PER_G), 'g', digits)], added };
   }
-  const SO2 = SO2Line(work, digits);
-  if (SO2 === undefined) return { lines: [] };
-  if (request.volume_L === undefined) return { lines: [SO2] };
-  const volume = volumeTerm(request.volume_L, request.volume_display, digits);
-  const added = line('added-concentration', over(SO2.result, volume), 'mg/L', digits);
-  return { lines: [SO2, added], added: added.result };
+  const { SO2, lines } = SO2Of(work, digits);
+  if (SO2 === undefined || request.volume_L === undefined) return { lines };
+  const { volume, lines: found } = volumeInLitres(request.volume_L, request.volume_display, digits);
+  const added = line('added-concentration', over(times(SO2, MG_PER_G), volume), 'mg/L', digits);
+  return { lines: [...lines, ...found, added], added: added.result };
 }
 
 function landingLines(work: EffectWork, added: Term | undefined, digits: number): Line[] {
@@ -95,7 +97,7 @@ function landingLines(work: EffectWork, added: Term | undefined, digits: number)
  *
  * @example
  * ```ts
- * effectSteps({ request: { mass_g: 100, volume_L: 2000 }, content: { of: 'yield', per: 'g', fraction: 0.5 }, leadsTo: 25 }).map((step) => step.substituted) // => ['100 g * 0.5', '50 g / (2000 L)']
+ * effectSteps({ request: { mass_g: 100, volume_L: 2000 }, content: { of: 'yield', per: 'g', fraction: 0.5 }, leadsTo: 25 }).map((step) => step.substituted) // => ['100 g * 0.5', '50 g * 1000 mg/g / (2000 L)']
  * ```
  */
 export function effectSteps(work: EffectWork): readonly Step[] {

@@ -4,15 +4,22 @@ import { SO2ContentOf, SO2Per } from '../additives/so2-content.ts';
 import { SO2In } from '../additives/so2-in.ts';
 import { assertWithinBounds } from '../bounds.ts';
 import { shown } from '../units/shown.ts';
-import { over, times, type Step } from '../working.ts';
+import { over, times } from '../working.ts';
 import type { SolutionAnswer } from './answer.ts';
 import { effectSteps } from './effect-steps.ts';
 import { line, printAlike, withEnoughDigits } from './line.ts';
 import type { SolutionRequest } from './request.ts';
 import { measureOf, toStep } from './rounding.ts';
-import { contentTerm, volumeTerm } from './terms.ts';
+import { number } from './terms.ts';
+import { volumeInLitres } from './volume-in-litres.ts';
 
 const mL_of = (volume_L: number): number => volume_L * 1000;
+
+/** 100 mL as the working shows it beside litres. */
+const TENTH_L = shown(0.1, 'L');
+
+/** A stock of 100 mL holds just its strength, so that nothing is left to reckon. */
+const isHundred_mL = (volume_L: number): boolean => Math.abs(volume_L - 0.1) < 1e-12;
 
 /** A stock of a stated strength: what salt to weigh, filled up to the volume. */
 function byStrength(request: SolutionRequest): SolutionAnswer {
@@ -27,28 +34,26 @@ function byStrength(request: SolutionRequest): SolutionAnswer {
   const salt_g = (perHundred / 100) * mL_of(volume_L);
   const rounded = measureOf(salt_g, 'scale');
   const make = (digits: number) => {
-    const volume = volumeTerm(volume_L, request.volume_display, digits);
-    const perMillilitre = over(shown(perHundred, 'g'), shown(100, 'mL'));
-    const strength = contentTerm(content, digits);
-    const salt = line('salt-mass', times(perMillilitre, volume), 'g', digits);
     // In grams per 100 mL the figure is what 100 mL hold, in grams.
-    const SO2 =
-      strength === undefined
-        ? []
-        : [line('solution-strength-by-salt', times(shown(100, 'mL'), strength), 'g', digits)];
-    return { salt, SO2 };
+    const held = shown(perHundred, 'g');
+    const share = number(ADDITIVES[additive.id].SO2_share, digits);
+    const SO2 = line('solution-strength-by-salt', times(held, share), 'g', digits);
+    if (isHundred_mL(volume_L)) return { lines: [SO2], salt_g };
+    const { volume, lines } = volumeInLitres(volume_L, request.volume_display, digits);
+    const salt = line('salt-mass', times(over(held, TENTH_L), volume), 'g', digits);
+    return { lines: [SO2, ...lines, salt], salt_g: salt.step.result.value };
   };
   const made = withEnoughDigits(
     make,
-    ({ salt }) => toStep(salt.step.result.value, rounded.step) === toStep(salt_g, rounded.step),
+    (printed) => toStep(printed.salt_g, rounded.step) === toStep(salt_g, rounded.step),
   );
-  const steps: readonly Step[] = [...made.SO2.map(({ step }) => step), made.salt.step];
-  return { salt_g, ...whole, measure: rounded.measure, steps };
+  return { salt_g, ...whole, measure: rounded.measure, steps: made.lines.map(({ step }) => step) };
 }
 
 /** A stock of what is said to go in: how strong it is. */
 function byAmount(request: SolutionRequest, additive: AdditiveAtHand): SolutionAnswer {
-  const { volume_L, mass_g, additive_volume_mL } = request;
+  const { volume_L, volume_display, ...goesIn } = request;
+  const { mass_g, additive_volume_mL } = goesIn;
   const amount = {
     ...(mass_g === undefined ? {} : { salt_g: mass_g }),
     ...(additive_volume_mL === undefined ? {} : { additive_volume_mL }),
@@ -59,24 +64,26 @@ function byAmount(request: SolutionRequest, additive: AdditiveAtHand): SolutionA
   const rounded = measureOf(mass_g ?? additive_volume_mL ?? 0, mass_g === undefined ? 'cylinder' : 'scale');
   const content = SO2ContentOf(additive);
   const [first] = effectSteps({
-    request: { ...request, additive },
+    request: { ...goesIn, additive },
     ...(content === undefined ? {} : { content }),
     leadsTo: undefined,
   });
   const strength = withEnoughDigits(
     (digits) => {
+      if (isHundred_mL(volume_L)) return [];
       const SO2 = shown(first?.result.value ?? SO2_g, 'g', digits);
-      const volume = volumeTerm(volume_L, request.volume_display, digits);
-      return line('solution-strength', times(over(SO2, volume), shown(100, 'mL')), 'g', digits);
+      const { volume, lines } = volumeInLitres(volume_L, volume_display, digits);
+      return [...lines, line('solution-strength', times(over(SO2, volume), TENTH_L), 'g', digits)];
     },
-    ({ step }) => printAlike(step.result.value, strength_SO2_g_per_100_mL),
+    (lines) =>
+      printAlike(lines.at(-1)?.step.result.value ?? strength_SO2_g_per_100_mL, strength_SO2_g_per_100_mL),
   );
   return {
     ...amount,
     volume_L,
     strength_SO2_g_per_100_mL,
     measure: rounded.measure,
-    steps: [...(first === undefined ? [] : [first]), strength.step],
+    steps: [...(first === undefined ? [] : [first]), ...strength.map(({ step }) => step)],
   };
 }
 

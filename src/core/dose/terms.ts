@@ -3,8 +3,7 @@ import { cellAround } from '../chemistry/interpolate.ts';
 import { OIV_TABLE_2 } from '../chemistry/dissociation-tables.ts';
 import type { Dissociation } from '../chemistry/dissociation.ts';
 import type { StepName } from '../step-names.ts';
-import { LITRES_IN } from '../units/volume.ts';
-import { shown, type ShownUnit, type VolumeShown } from '../units/shown.ts';
+import { shown, type ShownUnit } from '../units/shown.ts';
 import { minus, over, plus, roundTo, tenTo, termOf, times, type Term } from '../working.ts';
 import { line, type Line } from './line.ts';
 
@@ -71,23 +70,6 @@ export function pKLine(
   // One digit more than the rest, as it stands in an exponent.
   const pK = line('dissociation', over(sum, times(minus(a1, a0), minus(t1, t0))), '', digits + 1);
   return { pK: pK.result, lines: [pK] };
-}
-
-/**
- * A volume as the person wrote it where that is the same volume, else in litres.
- *
- * @param volume_L in L, above 0
- * @param display the same in another unit
- *
- * @example
- * ```ts
- * volumeTerm(5488.8470868, { value: 1450, unit: 'galUS' }, 4).text // => '1450 galUS'
- * ```
- */
-export function volumeTerm(volume_L: number, display: VolumeShown | undefined, digits: number): Term {
-  if (display === undefined) return shown(volume_L, 'L', digits);
-  const same = Math.abs(display.value * LITRES_IN[display.unit] - volume_L) <= volume_L * 1e-9;
-  return same ? shown(display.value, display.unit, digits) : shown(volume_L, 'L', digits);
 }
 
 /**

@@ -4,7 +4,9 @@ import { expressionText, resultText, shortExpression } from '../../../src/chat/r
 
 test.each([
   ['0.8 mg/L * (10^(3.58 - 1.81) + 1)', '0,8 mg/L × (10^(3,58 − 1,81) + 1)'],
-  ['6 g / (2 L)', '6 g ÷ (2 L)'],
+  ['6 g / (2 L)', '6 g ÷ 2 L'],
+  ['1450 galUS * 3.78541 L/galUS', '1_450 gal × 3,78541'],
+  ['26.91 mg/L * 5488.8 L / (1000 mg/g)', '26,91 mg/L × 5_488,8 L ÷ 1_000'],
   ['26.91 mg/L * 1450 galUS', '26,91 mg/L × 1_450 gal'],
   ['5 mg/L * 20 galUK', '5 mg/L × 20 imp gal'],
   ['0.4497 g / (0.44 g * 0.57629)', '0,4497 g ÷ (0,44 g × 0,57629)'],
@@ -18,12 +20,18 @@ test('expressionText() keeps every digit of a figure, so that anyone can reckon 
 });
 
 test.each([
-  ['47.91 mg/L - 21 mg/L', 'mg/L', '47.91 - 21'],
-  ['20 mg/L / (1 - 1 / 3)', 'mg/L', '20 / (1 - 1 / 3)'],
-  ['57.6 g / (20 hL)', 'mg/L', '57.6 g / (20 hL)'],
-  ['15 mg/L * 40 hL', 'g', '15 mg/L * 40 hL'],
-])('shortExpression() leaves the unit out of %s only where all is %s', (expression, unit, text) => {
-  expect(shortExpression(expression, unit)).toBe(text);
+  ['47.91 mg/L - 21 mg/L', '47.91 - 21'],
+  ['20 mg/L / (1 - 1 / 3)', '20 / (1 - 1 / 3)'],
+  ['57.6 g * 1000 mg/g / (2000 L)', '57.6 * 1000 / 2000'],
+  ['15 mg/L * (4000 L / 2) / (1000 mg/g)', '15 * (4000 / 2) / 1000'],
+  ['75 g / (15 g / (100 mL))', '75 g / (15 g / (100 mL))'],
+])('shortExpression() leaves the units of %s out where mg/L is among them', (expression, text) => {
+  expect(shortExpression(expression)).toBe(text);
+});
+
+test('a working says ppm where the person wrote ppm', () => {
+  expect(expressionText('47.9 mg/L - 21 mg/L', '.', 'ppm')).toBe('47.9 ppm − 21 ppm');
+  expect(resultText({ value: 26.9, unit: 'mg/L' }, '.', 'ppm')).toBe('26.9 ppm');
 });
 
 test('resultText() writes a number with its unit, and a bare one without', () => {

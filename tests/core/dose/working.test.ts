@@ -16,7 +16,8 @@ describe('a working as it is printed', () => {
         ['M', 'molecular-now', '21 mg/L / (10^(3.58 - 1.81) + 1)', { value: 0.351, unit: 'mg/L' }],
         ['F', 'free-needed', '0.8 mg/L * (10^(3.58 - 1.81) + 1)', { value: 47.91, unit: 'mg/L' }],
         ['A', 'addition', '47.91 mg/L - 21 mg/L', { value: 26.91, unit: 'mg/L' }],
-        ['S', 'so2-mass', '26.91 mg/L * 1450 galUS', { value: 147.7, unit: 'g' }],
+        ['V', 'volume-in-litres', '1450 galUS * 3.78541 L/galUS', { value: 5488.8, unit: 'L' }],
+        ['S', 'so2-mass', '26.91 mg/L * 5488.8 L / (1000 mg/g)', { value: 147.7, unit: 'g' }],
         ['m', 'additive-mass', '147.7 g / 0.57629', { value: 256.3, unit: 'g' }],
       ],
     );
@@ -26,7 +27,7 @@ describe('a working as it is printed', () => {
     ['an allowance', { binding_allowance_percent: 30 }, '26.91 mg/L * (1 + 30 / 100)'],
     ['a third that binds', { binding_share: 1 / 3 }, '26.91 mg/L / (1 - 1 / 3)'],
     ['a share that binds', { binding_share: 0.35 }, '26.91 mg/L / (1 - 0.35)'],
-    ['several vessels', { vessels: 2 }, '26.91 mg/L * (1450 galUS / 2)'],
+    ['several vessels', { vessels: 2 }, '26.91 mg/L * (5488.8 L / 2) / (1000 mg/g)'],
     [
       'an assay',
       { additive: { id: 'potassium-metabisulfite', strength_percent: 96 } },
@@ -58,7 +59,7 @@ describe('a working as it is printed', () => {
 
   test('a volume that the person wrote otherwise than it is shown stands in litres', () => {
     const { steps } = doseOf({ volume_L: 5488.8470868, volume_display: { value: 1451, unit: 'galUS' } });
-    expect(steps.map((step) => step.substituted)).toContain('26.91 mg/L * 5488.85 L');
+    expect(steps.map((step) => step.substituted)).toContain('26.91 mg/L * 5488.85 L / (1000 mg/g)');
   });
 
   test('a figure at a rounding mark does not run into fifteen digits', () => {
@@ -107,10 +108,55 @@ describe('every way of asking has a working that holds', () => {
       solution({ volume_L: 5, additive: { id: 'potassium-metabisulfite-solution', strength_percent: 10 } }),
     ],
     ['a stock by mass', solution({ volume_L: 0.1, mass_g: 10, additive: POWDER })],
+    [
+      'a stock by mass in mL',
+      solution({ volume_L: 0.25, volume_display: { value: 250, unit: 'mL' }, mass_g: 10, additive: POWDER }),
+    ],
+    ['hectolitres', doseOf({ volume_L: 1234.5, volume_display: { value: 12.345, unit: 'hL' } })],
+    [
+      'imperial gallons',
+      effectOf({ mass_g: 100, volume_L: 454.609, volume_display: { value: 100, unit: 'galUK' } }),
+    ],
   ])('%s', (_what, { steps }) => {
     expect(steps.length).toBeGreaterThan(0);
     expect(steps.map(wrongIn).filter(Boolean)).toEqual([]);
     expect(loose(steps)).toEqual([]);
+  });
+});
+
+describe('a pocket calculator gets there', () => {
+  test.each([
+    ['gallons', doseOf(US)],
+    ['hectolitres', doseOf({ volume_L: 1200, volume_display: { value: 12, unit: 'hL' } })],
+    ['barrels', doseOf({ volume_L: 1350, vessels: 6 })],
+    ['an effect', effectOf({ mass_g: 100, volume_L: 2000, volume_display: { value: 20, unit: 'hL' } })],
+    ['a rate', effectOf({ rate_mg_L: 100, volume_L: 500, volume_display: { value: 5, unit: 'hL' } })],
+    ['an addition', added({ added_mg_L: 26, volume_L: 1000, additive: POWDER })],
+    ['a solution', doseOf({ additive: { id: 'potassium-metabisulfite-solution', strength_percent: 10 } })],
+    [
+      'a stock',
+      solution({ volume_L: 5, additive: { id: 'potassium-metabisulfite-solution', strength_percent: 10 } }),
+    ],
+    ['a stock by mass', solution({ volume_L: 5, mass_g: 500, additive: POWDER })],
+  ])('with the bare figures of %s', (_what, { steps }) => {
+    for (const { substituted, result } of steps) {
+      const bare = substituted.replaceAll(/(\d) [a-zA-Z]\w*(\/[a-zA-Z]\w*)?/g, '$1');
+      const step = { symbol: '', name: 'addition', formula: '', substituted: bare } as const;
+      expect(wrongIn({ ...step, result: { value: result.value, unit: '' } })).toBeUndefined();
+    }
+  });
+
+  test('and no line says what it says already', () => {
+    const hundred = { volume_L: 0.1, volume_display: { value: 100, unit: 'mL' } } as const;
+    const steps = [
+      ...added({ mass_g: 10, volume_L: 225, additive: { id: 'tablet', tablet_SO2_g: 5 } }).steps,
+      ...added({ mass_g: 10, additive: { id: 'sulfur-dioxide-gas' } }).steps,
+      ...solution({ ...hundred, mass_g: 10, additive: POWDER }).steps,
+    ];
+    expect(steps.map(({ substituted }) => substituted)).toEqual([
+      '10 g * 1000 mg/g / (225 L)',
+      '10 g * 0.57629',
+    ]);
   });
 });
 

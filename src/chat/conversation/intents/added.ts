@@ -29,7 +29,7 @@ export function answerAdded(reading: Reading, turn: Turn): Outcome {
       line('effect', 'measure-tomorrow'),
       ...factLines(reading, manner),
       ...assumedLines(reading, manner),
-      ...workingLines(answer.steps, manner.mark),
+      ...workingLines(answer.steps, manner),
     ],
     buttons: answer.steps.length > 0 ? buttonsFor(turn.number, ['w', 's']) : [],
   };

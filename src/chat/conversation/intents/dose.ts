@@ -68,7 +68,7 @@ function wholeDose(reading: Reading, request: DoseRequest, answer: DoseAnswer, t
       ...expectationLines(reading, answer, otherArithmetic(request), manner),
       ...factLines(reading, manner),
       ...assumedLines(reading, manner),
-      ...workingLines(answer.steps, manner.mark),
+      ...workingLines(answer.steps, manner),
       ...warningLines(answer.warnings, manner, 'warning', lowIsSaid(reading)),
       ...cautionLines(additive.id, inFull),
     ],

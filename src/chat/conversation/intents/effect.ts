@@ -40,7 +40,7 @@ export function answerEffect(reading: Reading, turn: Turn): Outcome {
       ...(landing ? [landing] : []),
       ...factLines(reading, manner),
       ...assumedLines(reading, manner),
-      ...workingLines(answer.steps, manner.mark),
+      ...workingLines(answer.steps, manner),
       ...warningLines(answer.warnings, manner, 'warning', landing ? ['free-low-may-bind-all'] : []),
       ...cautionLines(additive.id, inFull),
     ],

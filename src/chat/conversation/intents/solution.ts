@@ -37,7 +37,7 @@ export function answerSolution(reading: Reading, turn: Turn): Outcome {
       line('effect', 'solution-fresh'),
       ...factLines(reading, manner),
       ...assumedLines(reading, manner),
-      ...workingLines(answer.steps, manner.mark),
+      ...workingLines(answer.steps, manner),
       ...cautionLines(id, inFull),
     ],
     buttons: buttonsFor(turn.number, inFull ? ['w'] : ['w', 's']),

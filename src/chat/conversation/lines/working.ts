@@ -1,8 +1,8 @@
 import { SOURCES } from '../../../core/sources.ts';
 import type { Step } from '../../../core/working.ts';
-import type { DecimalMark } from '../../replies/number-text.ts';
 import type { Line } from '../../replies/reply.ts';
 import { expressionText, resultText, shortExpression } from '../../replies/working-text.ts';
+import type { Manner } from '../manner.ts';
 import { line } from './line.ts';
 
 /** Lines of working that stand in a reply; the rest is behind the button. */
@@ -12,27 +12,38 @@ const MOST_LINES = 5;
 const GIVE_WAY: readonly Step['name'][] = ['dissociation', 'molecular-now', 'molecular-after', 'free-after'];
 
 /** The three to five lines of the working that lead to the amount. */
-export function workingLines(steps: readonly Step[], mark: DecimalMark): Line[] {
+export function workingLines(steps: readonly Step[], manner: Pick<Manner, 'mark' | 'unit'>): Line[] {
   let shown = steps;
   for (const name of GIVE_WAY) if (shown.length > 4) shown = shown.filter((step) => step.name !== name);
-  return shown.slice(-MOST_LINES).map((step) => line('working', 'working', shortValues(step, mark)));
+  // What all vessels take is told as what is measured for each, so often over.
+  if (shown.length > MOST_LINES) shown = shown.filter(({ name }) => name !== 'all-vessels');
+  if (shown.length > MOST_LINES) shown = shown.filter((step) => !isPlainVolume(step));
+  return shown.slice(-MOST_LINES).map((step) => line('working', 'working', shortValues(step, manner)));
+}
+
+/** Hectolitres are litres with two noughts more; gallons are not. */
+function isPlainVolume({ name, substituted }: Step): boolean {
+  return name === 'volume-in-litres' && !substituted.includes('gal');
 }
 
 /** The whole working: each line with its name, its formula in words, the numbers put in, and the source. */
-export function wholeWorking(steps: readonly Step[], mark: DecimalMark): Line[] {
+export function wholeWorking(steps: readonly Step[], manner: Pick<Manner, 'mark' | 'unit'>): Line[] {
   return steps.flatMap((step, at) => [
     line('first', `step-${step.name}`),
-    line('first', 'working-symbol', { ...stepValues(step, mark), symbol: step.symbol }),
+    line('first', 'working-symbol', { ...stepValues(step, manner), symbol: step.symbol }),
     ...(step.source === undefined || step.source === steps[at - 1]?.source
       ? []
       : [line('first', 'working-source', { source: SOURCES[step.source].title })]),
   ]);
 }
 
-function stepValues({ substituted, result }: Step, mark: DecimalMark): Record<string, string> {
-  return { substituted: expressionText(substituted, mark), result: resultText(result, mark) };
+function stepValues(
+  { substituted, result }: Step,
+  { mark, unit }: Pick<Manner, 'mark' | 'unit'>,
+): Record<string, string> {
+  return { substituted: expressionText(substituted, mark, unit), result: resultText(result, mark, unit) };
 }
 
-function shortValues(step: Step, mark: DecimalMark): Line['values'] {
-  return stepValues({ ...step, substituted: shortExpression(step.substituted, step.result.unit) }, mark);
+function shortValues(step: Step, manner: Pick<Manner, 'mark' | 'unit'>): Line['values'] {
+  return stepValues({ ...step, substituted: shortExpression(step.substituted) }, manner);
 }

@@ -55,7 +55,7 @@ function reckonAgain(reading: Reading, settings: Settings): Reckoned {
 /** The whole working of a remembered reading, line by line, with its sources. */
 export function workingOf(reading: Reading, mark: DecimalMark, settings: Settings): Line[] {
   const { steps } = reckonAgain(reading, settings);
-  return [line('first', 'working-head', { vessel: vesselText(reading) }), ...wholeWorking(steps, mark)];
+  return [line('first', 'working-head', { vessel: vesselText(reading) }), ...wholeWorking(steps, mannerOf(reading, mark, settings))];
 }
 
 /** The cautions of a reading's additive in full. */
