@@ -24,6 +24,7 @@ test.each([
   ['free_mg_L', 0, 1000],
   ['ph', 2.5, 4.8],
   ['binding_share', 0, 0.8],
+  ['vessels', 1, 10_000],
 ] as const)('%s lies from %d to %d', (field, min, max) => {
   expect(BOUNDS[field]).toMatchObject({ min, max });
 });
