@@ -20,6 +20,8 @@ const ROWS = [
   ["1'200", none, 1200, false],
   ["3'25", none, 3.25, false],
   ['12.3456', comma, 12.3456, false],
+  ["1.234,567'8", comma, 1234567.8, true],
+  ['1.23.4', comma, 1234, true],
 ] as const;
 
 test.each(ROWS)('the numeral %s with %j is %d, unsure: %s', (raw, grouping, value, unsure) => {

@@ -12,6 +12,8 @@ const ROWS: readonly (readonly [AwaitedField['field'], string, unknown])[] = [
   ['free_mg_L', '21', { free_mg_L: 21 }],
   ['free_mg_L', '21 ppm', { free_mg_L: 21 }],
   ['target', '0.6', { target: { molecular_mg_L: 0.6 } }],
+  ['target', '2', { target: { molecular_mg_L: 2 } }],
+  ['target', '2.1', { target: { free_mg_L: 2.1 } }],
   ['target', '30', { target: { free_mg_L: 30 } }],
   ['strength_percent', '10 %', { strength_percent: 10 }],
   ['tablet_salt_g', '0.44 g', { tablet_salt_g: 0.44 }],
@@ -27,9 +29,13 @@ test.each(ROWS)('while %s is asked, %j is its value', (field, text, fields) => {
 
 const BAD = [
   ['ph', '36', 'ph-out-of-range'],
+  ['ph', '4.81', 'ph-out-of-range'],
+  ['ph', '2.49', 'ph-out-of-range'],
   ['volume_L', '0', 'volume-not-positive'],
+  ['volume_L', '10000001', 'value-out-of-range'],
   ['volume_L', '1.200', 'ambiguous-number'],
   ['free_mg_L', '-4', 'negative-value'],
+  ['free_mg_L', '1001', 'value-out-of-range'],
 ] as const;
 
 test.each(BAD)('while %s is asked, %j is refused as %s', (field, text, code) => {
