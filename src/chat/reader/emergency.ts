@@ -7,6 +7,15 @@ import { fr } from './words/fr.ts';
 import { it } from './words/it.ts';
 import { pt } from './words/pt.ts';
 
+/** What an emergency is about: it decides which line of the reply comes first. */
+export type Danger = 'person' | 'eyes' | 'swallowed' | 'skin' | 'gas';
+
+/** An emergency: in which language it was recognised, and what it is about. */
+export interface Emergency {
+  readonly language: Language;
+  readonly danger: Danger;
+}
+
 /** Where a group of words stands: the indices of its first and last word. */
 interface Hit {
   readonly from: number;
@@ -53,6 +62,10 @@ const OPENERS: ReadonlySet<DangerId> = new Set<DangerId>([
   'alarm',
   'fell',
   'silent',
+  'unwell',
+  'mixed',
+  'skin',
+  'smell',
 ]);
 
 function hitsByLanguage(words: readonly string[]): Map<Language, Map<DangerId, Hit[]>> {
@@ -103,44 +116,76 @@ const isDropped = (hits: Hits): boolean =>
     ),
   );
 
-function isDanger(hits: Hits, words: readonly string[]): boolean {
-  const person = (['down', 'breathless'] as const).some((id) =>
-    all(hits, id).some((hit) => !isThing(hits, words, hit)),
+/** A group of words of the message, without those that are only a manner of speaking. */
+const literal = (hits: Hits, id: DangerId): readonly Hit[] =>
+  all(hits, id).filter(
+    ({ from, to }) => !all(hits, 'idiom').some((idiom) => idiom.from <= from && idiom.to >= to),
   );
-  if (person) return true;
-  if (all(hits, 'hurt-eye').some(({ to }) => !(words[to] === 'eyes' && words[to + 1] === 'of'))) return true;
-  if (all(hits, 'swallowed').some((hit) => !isThing(hits, words, hit))) return true;
-  if ((has(hits, 'drank') || has(hits, 'burnt')) && has(hits, 'chemical')) return true;
-  if (isGasLeak(hits, words)) return true;
-  if (has(hits, 'alarm') && !has(hits, 'elsewhere')) return true;
+
+const isGas = (hits: Hits): boolean => has(hits, 'gas') && has(hits, 'smell') && has(hits, 'place');
+
+/** What the danger is, where there is one; the matter that the reply begins with. */
+function dangerOf(hits: Hits, words: readonly string[]): Danger | undefined {
+  if (all(hits, 'hurt-eye').some(({ to }) => !(words[to] === 'eyes' && words[to + 1] === 'of')))
+    return 'eyes';
+  if (literal(hits, 'swallowed').some((hit) => !isThing(hits, words, hit))) return 'swallowed';
+  if (has(hits, 'drank') && has(hits, 'chemical')) return 'swallowed';
+  const isPerson = (['down', 'breathless'] as const).some((id) =>
+    literal(hits, id).some((hit) => !isThing(hits, words, hit)),
+  );
+  if (isPerson) return 'person';
+  if ((has(hits, 'burnt') || has(hits, 'skin')) && has(hits, 'chemical')) return 'skin';
+  if (isGasLeak(hits, words) || isGas(hits)) return 'gas';
   const vessel = has(hits, 'vessel') || words.some((word) => /^(t|fv)\d{1,3}$/.test(word));
+  if (
+    has(hits, 'unwell') &&
+    (vessel || has(hits, 'gas') || has(hits, 'chemical')) &&
+    !isOnlyThing(hits, words)
+  )
+    return 'gas';
+  if (has(hits, 'mixed') && has(hits, 'chemical') && has(hits, 'reactive') && isChlorine(hits, words))
+    return 'gas';
+  if (literal(hits, 'alarm').length > 0 && !has(hits, 'elsewhere')) return 'person';
+  if (has(hits, 'fell') && has(hits, 'person') && vessel && !isDropped(hits)) return 'person';
+  if (!has(hits, 'silent')) return undefined;
   const inside = all(hits, 'went-in').some((hit) => !isThing(hits, words, hit));
-  if (has(hits, 'fell') && has(hits, 'person') && vessel && !isDropped(hits)) return true;
-  if (!has(hits, 'silent')) return false;
-  return (
+  const isLost =
     (inside && (has(hits, 'person') || !has(hits, 'elsewhere'))) ||
-    (has(hits, 'person') && vessel && !has(hits, 'elsewhere'))
-  );
+    (has(hits, 'person') && vessel && !has(hits, 'elsewhere'));
+  return isLost ? 'person' : undefined;
 }
+
+const isOnlyThing = (hits: Hits, words: readonly string[]): boolean =>
+  all(hits, 'unwell').every((hit) => isThing(hits, words, hit));
+
+/** Sulfite with citric acid is a holding solution; with bleach it is poison gas. */
+const isChlorine = (hits: Hits, words: readonly string[]): boolean =>
+  all(hits, 'reactive').some(({ from }) => !ACIDS.test(words[from] ?? ''));
+
+const ACIDS = /^(ac[iy]d|saure|citric|phosphoric|cleaner|pbw)/;
 
 /**
  * Recognises somebody in danger, in all six languages whatever the chat's.
  *
  * @param text A folded message.
  * @param chat The chat's language, which is looked at first.
- * @returns The language in which it was recognised, or undefined.
+ * @returns The language in which it was recognised and what it is about, or undefined.
  * @example
  * ```ts
- * recogniseEmergency('the new guy collapsed', 'en') // => 'en'
+ * recogniseEmergency('the new guy collapsed', 'en') // => { language: 'en', danger: 'person' }
  * recogniseEmergency('eyes on t4 please', 'en') // => undefined
- * recogniseEmergency('ne respire plus', 'en') // => 'fr'
+ * recogniseEmergency('ne respire plus', 'en') // => { language: 'fr', danger: 'person' }
  * ```
  */
-export function recogniseEmergency(text: string, chat: Language): Language | undefined {
+export function recogniseEmergency(text: string, chat: Language): Emergency | undefined {
   const words = text.match(/[\p{L}\d]+(?:'\p{L}+)*/gu);
   if (!words) return undefined;
   const found = hitsByLanguage(words);
   const languages = [...found].filter(([, hits]) => [...hits.keys()].some((id) => OPENERS.has(id)));
   const ordered = languages.toSorted(([a], [b]) => Number(b === chat) - Number(a === chat));
-  return ordered.find(([, hits]) => isDanger(hits, words))?.[0];
+  for (const [language, hits] of ordered) {
+    const danger = dangerOf(hits, words);
+    if (danger) return { language, danger };
+  }
+  return undefined;
 }

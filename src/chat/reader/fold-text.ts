@@ -24,6 +24,7 @@ const PLAIN: Readonly<Record<string, string>> = {
   '⇒': '→',
   '➔': '→',
   '➜': '→',
+  '…': '…',
   º: '°',
   '˚': '°',
   '℃': '°c',

@@ -2,7 +2,7 @@ import type { Lexicon } from './lexicon.ts';
 
 /** Ordinary words, and chemicals of another kind, that are one letter from a cellar word and none. */
 const NEVER = new Set([
-  'libre', 'livre', 'libra', 'livres', 'libres',
+  'metabisulfide', 'metabisulphide', 'bisulfide', 'libre', 'livre', 'libra', 'livres', 'libres',
   'while', 'write', 'bottle', 'gallop', 'sugary', 'adder', 'tanks', 'thanks', 'carrel', 'quarrel', 'liter', 'latter',
   'later', 'letter', 'lighter', 'volumes', 'tempo', 'tempt', 'temple', 'targe', 'barrelled', 'sugared', 'bonding',
   'blinding', 'winding', 'finding', 'minding', 'sulfide', 'sulphide', 'sulfate', 'sulphate', 'bisulfide', 'metabisulfate',

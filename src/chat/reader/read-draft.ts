@@ -11,6 +11,7 @@ import { findLetterPair } from './finders/letter-pair.ts';
 import { findMass } from './finders/mass.ts';
 import { findNumberWord } from './finders/number-word.ts';
 import { findOtherAdditive } from './finders/other-additive.ts';
+import { findOtherQuantities } from './finders/other-quantities.ts';
 import { findOtherFigures } from './finders/other-figures.ts';
 import { findPairs } from './finders/pairs.ts';
 import { findPastTense } from './finders/past-tense.ts';
@@ -40,8 +41,9 @@ const FINDERS: readonly Finder[] = [
   findLetterPair,
   findVessel,
   findOtherFigures,
-  findAllowance,
   findSolutionUse,
+  findOtherQuantities,
+  findAllowance,
   findSpoon,
   findRate,
   findTablets,

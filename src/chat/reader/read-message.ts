@@ -108,12 +108,12 @@ export function readMessage(text: string, settings: ReaderSettings, waiting?: Aw
   if (text.length > LONGEST_MESSAGE) {
     const danger = recogniseEmergency(foldText(text.slice(0, LONGEST_MESSAGE)).text, settings.language);
     return danger
-      ? understood([empty('emergency')], {}, danger)
+      ? understood([empty('emergency', { topic: danger.danger })], {}, danger.language)
       : understood([empty('chat', { problems: [{ code: 'too-long', about: '' }] })]);
   }
   const folded = foldText(text);
   const danger = recogniseEmergency(folded.text, settings.language);
-  if (danger) return understood([empty('emergency')], {}, danger);
+  if (danger) return understood([empty('emergency', { topic: danger.danger })], {}, danger.language);
   const answer = waiting && readWaiting(folded.text.trim(), waiting, settings);
   if (answer) return understood([answer]);
   const terms = joinNumbers(splitTerms(folded, LEXICON));

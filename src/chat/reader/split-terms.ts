@@ -139,9 +139,17 @@ function phraseAt(
     const entry = lexicon.phrases.get(text);
     if (entry) found = { entry, next: k };
     const hyphen = pieces[k];
-    if (hyphen?.kind === 'mark' && hyphen.text === '-' && !hyphen.gap && pieces[k + 1]?.gap === false) k++;
+    const joins =
+      hyphen?.kind === 'mark' && (hyphen.text === '-' || (hyphen.text === '.' && piece.text.length === 1));
+    if (joins && !hyphen.gap && pieces[k + 1]?.gap === false) k++;
   }
   return found;
+}
+
+/** `the free's 19`: a known word with "is" drawn together. */
+function shortIs({ text }: Term, i: number, lexicon: Lexicon): { entry: Entry; next: number } | undefined {
+  const entry = text.endsWith("'s") ? lexicon.phrases.get(text.slice(0, -2)) : undefined;
+  return entry && { entry, next: i + 1 };
 }
 
 /**
@@ -162,7 +170,8 @@ export function splitTerms(folded: FoldedText, lexicon: Lexicon): Term[] {
   const terms: Term[] = [];
   for (let i = 0; i < pieces.length;) {
     const piece = termIn(pieces, i);
-    const found = piece.kind === 'word' ? phraseAt(pieces, i, lexicon) : undefined;
+    const found =
+      piece.kind === 'word' ? (phraseAt(pieces, i, lexicon) ?? shortIs(piece, i, lexicon)) : undefined;
     if (!found) {
       const mended = piece.kind === 'word' ? mendWord(piece.text, lexicon) : undefined;
       const tags = mended === undefined ? undefined : lexicon.phrases.get(mended)?.tags;

@@ -1,5 +1,5 @@
 import type { Board } from './board.ts';
-import { holdsCue } from './board.ts';
+import { holdsCue, isCue } from './board.ts';
 
 const NOD = /[\u{1F44D}\u{1F44C}\u{1F64F}\u{1F377}\u{1F642}\u{1F600}-\u{1F60A}\u{2764}\u{2705}]/u;
 
@@ -10,8 +10,10 @@ export function topicOf(board: Board): string | undefined {
   if (board.message.trimStart().startsWith('/start') || holdsCue(board, 'help')) return 'help';
   const words = board.terms.filter(({ kind }) => kind === 'word').length;
   if (words === 0 && NOD.test(board.message)) return 'thanks';
+  const greets = holdsCue(board, 'greeting') && words <= 6;
+  if (greets && isCue(board, 0, 'greeting')) return 'greeting';
   if (holdsCue(board, 'thanks') && words <= 8) return 'thanks';
-  return holdsCue(board, 'greeting') && words <= 6 ? 'greeting' : undefined;
+  return greets ? 'greeting' : undefined;
 }
 
 /** Whether nothing in a message is a word that is known: then it is said not to be understood. */

@@ -1,5 +1,5 @@
 import type { Board } from '../board.ts';
-import { figureAt, find, findingOf, hasTag, holdsCue, isCue, isFree, refuse, isLabelled } from '../board.ts';
+import { figureAt, find, findingOf, hasTag, isCue, isFree, refuse, isLabelled } from '../board.ts';
 import type { UnitId } from '../words/words.ts';
 import { VOLUME_UNITS, unitAt } from '../units.ts';
 import { litresOf } from './barrels.ts';
@@ -28,7 +28,8 @@ function isOfAdditive(board: Board, i: number, unit: UnitId, to: number, volumes
   const several =
     volumes > 1 || board.marks.barrelsAssumed_L !== undefined || findingOf(board, 'volume_L') !== undefined;
   const anyAdditive = findingOf(board, 'additive') !== undefined || board.marks.unnamedAdditive === true;
-  if (SMALL.includes(unit)) return anyAdditive || several || holdsCue(board, 'past');
+  const isReading = ['label:ph', 'label:free'].some((tag) => board.cues.has(tag as 'label:ph'));
+  if (SMALL.includes(unit)) return anyAdditive || board.pastTense || (several && !isReading);
   if (!isSolution(board) && board.marks.unnamedAdditive !== true) return false;
   const of = isCue(board, to + 1, 'of');
   const beside =

@@ -1,6 +1,7 @@
 import type { Target } from '../../../core/wine.ts';
 import type { Board } from '../board.ts';
 import { decimalAt, find, hasTag, isCue, isFree, isMark, refuse, termAt } from '../board.ts';
+import { isStranger } from '../stranger.ts';
 import { MASS_UNITS, VOLUME_UNITS, concentrationAt, mg_L_IN, unitAt } from '../units.ts';
 
 /** A bare target up to this is molecular, above it free, in mg/L. */
@@ -22,6 +23,11 @@ export const kindAt = (board: Board, i: number): Aim['kind'] => {
   return hasTag(board, i, 'label:ph') ? 'ph' : undefined;
 };
 
+/** `55F`, `4C`, `4 °C`: a temperature. */
+const isDegree = (board: Board, i: number): boolean =>
+  (hasTag(board, i, 'unit:C') || hasTag(board, i, 'unit:F') || hasTag(board, i, 'unit:degree')) &&
+  !isFree(board, i + 1);
+
 /** Whether what follows a figure makes it something else than a concentration: a volume, a mass, a per cent. */
 export const isOther = (board: Board, i: number): boolean =>
   unitAt(board, i, VOLUME_UNITS) !== undefined ||
@@ -29,6 +35,7 @@ export const isOther = (board: Board, i: number): boolean =>
   isMark(board, i, '%') ||
   isMark(board, i, '°') ||
   hasTag(board, i, 'vessel:barrel') ||
+  isDegree(board, i) ||
   hasTag(board, i, 'unit:none-of-ours') ||
   (isCue(board, i, 'thousand') && termAt(board, i).gap === false) ||
   isMark(board, i, '×') ||
@@ -84,8 +91,22 @@ export function keepAddition(board: Board, aim: Aim, from: number): void {
   if (aim.kind === 'molecular' || aim.kind === 'total' || aim.kind === 'ph')
     return refuse(board, 'ambiguous-number', from, aim.to);
   if (aim.mg_L < 0) return refuse(board, 'negative-value', from, aim.to);
+  const other = otherMatter(board, aim);
+  if (other !== undefined) return refuse(board, 'unknown-additive', from, other);
   if (board.pastTense) return find(board, 'added_mg_L', aim.mg_L, 'labelled', from, aim.to);
   find(board, 'target', { add_mg_L: aim.mg_L }, 'labelled', from, aim.to);
+}
+
+/** `add 0.5 g/L tartaric`, `add 100 ppm DAP`: a word in the place of SO2 that is another matter. */
+function otherMatter(board: Board, aim: Aim): number | undefined {
+  const unit = concentrationAt(board, aim.from + 1);
+  const next = isCue(board, aim.to + 1, 'of') ? aim.to + 2 : aim.to + 1;
+  const named =
+    hasTag(board, next, 'additive:none') || (hasTag(board, next, 'label:aside') && !isFree(board, next + 1));
+  const unknown = unit !== undefined && next === aim.to + 1 && isStranger(board, next);
+  return named || (unknown && termAt(board, next).text.length > 2) || unit?.id === 'g/L'
+    ? Math.min(next, board.terms.length - 1)
+    : undefined;
 }
 
 /** The term after a colon, "is", "of", "to" or an article. */

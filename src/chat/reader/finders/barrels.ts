@@ -1,6 +1,18 @@
 import { LITRES_IN } from '../../../core/units/volume.ts';
 import type { Board } from '../board.ts';
-import { claim, figureAt, find, hasTag, isCue, isFound, isFree, isMark, refuse, termAt } from '../board.ts';
+import {
+  claim,
+  figureAt,
+  find,
+  hasTag,
+  isCue,
+  isFound,
+  isFree,
+  isMark,
+  refuse,
+  termAt,
+  isLabelled,
+} from '../board.ts';
 import type { UnitId } from '../words/words.ts';
 import { unitAt } from '../units.ts';
 
@@ -46,7 +58,7 @@ function sizeAt(board: Board, i: number, bare: boolean): { volume_L: number; to:
 /** `40 x 225 L`, `6 x 60 gal barrels`, `6 barrels of 228`, `6 barrels (228 L)`, `6 225 L barrels`. */
 function findCounted(board: Board, i: number): boolean {
   const { value: count, from } = figureAt(board, i);
-  if (count < 0 || !Number.isInteger(count)) return false;
+  if (count < 0 || !Number.isInteger(count) || isLabelled(board, i)) return false;
   const named =
     board.taken[i + 1] === true
       ? false

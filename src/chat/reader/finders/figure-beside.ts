@@ -27,6 +27,9 @@ export interface Beside {
   readonly to: number;
 }
 
+/** Marks that people put between a label and its figure. */
+const GLYPHS = new Set(['~', '≈', '_', '•', '·', '|', '…', '*']);
+
 const isJoin = (board: Board, i: number): boolean => {
   const term = board.terms[i];
   if (term === undefined) return false;
@@ -34,7 +37,10 @@ const isJoin = (board: Board, i: number): boolean => {
     return (
       term.text === ':' ||
       term.text === '=' ||
-      term.text === '~' ||
+      GLYPHS.has(term.text) ||
+      (term.text === '.' && !term.gap && termAt(board, i - 1).text.length <= 4) ||
+      (term.text === '/' && !term.gap && !termAt(board, i + 1).gap) ||
+      (term.text === '→' && hasTag(board, i - 1, 'label:ph')) ||
       (term.text === '-' && !(term.gap && board.terms[i + 1]?.gap === false))
     );
   return isCue(board, i, 'is') && labelAt(board, i) === undefined;
@@ -87,6 +93,7 @@ export function figureBefore(board: Board, i: number): Beside | undefined {
 
 /** Whether a figure is a volume or a mass, so that no label of SO2 or pH may take it. */
 export const hasForeignUnit = (board: Board, at: number): boolean =>
+  (hasTag(board, at + 1, 'vessel:barrel') && board.taken[at + 1] !== true) ||
   unitAt(board, at + 1, VOLUME_UNITS) !== undefined ||
   (unitAt(board, at + 1, MASS_UNITS) !== undefined && concentrationAt(board, at + 1) === undefined);
 

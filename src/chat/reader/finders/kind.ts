@@ -1,6 +1,7 @@
 import type { Category, Product, Style } from '../../../core/wine.ts';
 import type { Board } from '../board.ts';
-import { find, hasTag, isCue, termAt } from '../board.ts';
+import { find, hasTag, isCue, termAt, isMark } from '../board.ts';
+import { isStranger } from '../stranger.ts';
 
 const STYLES: readonly Style[] = ['red', 'white', 'rosé'];
 const CATEGORIES: readonly Category[] = ['sweet', 'sparkling', 'fortified'];
@@ -16,6 +17,12 @@ function isOtherwise(board: Board, i: number): boolean {
   );
 }
 
+/** `Sweet!`, `sweet, thanks`: joy, and no wine. */
+const isThanks = (board: Board, i: number): boolean =>
+  i === 0 &&
+  isCue(board, i, 'thanks') &&
+  (isMark(board, 1, '!') || isMark(board, 1, ',') || isMark(board, 1, '.'));
+
 /** Finds colour, category and product, and the word organic. */
 export function findKind(board: Board): void {
   for (let i = 0; i < board.terms.length; i++) {
@@ -23,6 +30,8 @@ export function findKind(board: Board): void {
     const style = STYLES.find((one) => hasTag(board, i, `style:${one}`));
     const category = CATEGORIES.find((one) => hasTag(board, i, `category:${one}`));
     const product = PRODUCTS.find((one) => hasTag(board, i, `product:${one}`));
+    if (style && isStranger(board, i + 1)) continue;
+    if (category && (isStranger(board, i - 1) || isStranger(board, i + 1) || isThanks(board, i))) continue;
     if (style) find(board, 'style', style, 'labelled', i, i);
     else if (category) find(board, 'category', category, 'labelled', i, i);
     else if (product) find(board, 'product', product, 'labelled', i, i);

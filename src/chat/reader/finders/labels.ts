@@ -1,5 +1,6 @@
 import type { Board } from '../board.ts';
-import { claim, figureAt, hasTag, isCue, isFree, isMark, refuse, setAside, termAt } from '../board.ts';
+import { claim, figureAt, hasTag, isCue, isFree, isMark, refuse, setAside, termAt, find } from '../board.ts';
+import { isStranger } from '../stranger.ts';
 import { concentrationAt } from '../units.ts';
 import type { LabelId } from '../words/words.ts';
 import type { Beside } from './figure-beside.ts';
@@ -31,6 +32,29 @@ function asideEnd(board: Board, to: number): number {
   return isMark(board, to + 1, '%') || hasTag(board, to + 1, 'unit:none-of-ours') ? to + 1 : to;
 }
 
+/** `legal max 350 total`, `keep total below 120`: a bound and no measured figure. */
+const isLimit = (board: Board, i: number, { at, to }: Beside): boolean =>
+  [Math.min(i, at) - 1, Math.max(i, to) + 1].some((k) => isCue(board, k, 'limit')) ||
+  (at > i + 1 && isCue(board, i + 1, 'limit'));
+
+/** `are you free at 3`: the word alone, in a message that speaks of no wine. */
+function isSmallTalk(board: Board, label: LabelId, { at }: Beside): boolean {
+  if ((label !== 'free' && label !== 'total') || concentrationAt(board, at + 1) || board.terms.length <= 3)
+    return false;
+  if (termAt(board, at - 1).text.length > 4 && hasTag(board, at - 1, 'label:free')) return false;
+  const others = board.terms.some(
+    (term, k) =>
+      board.taken[k] === true ||
+      (term.kind === 'word' &&
+        term.tags.some((tag) =>
+          /^(label:(?!free|total|aside|volume)|unit:(?!none)|additive:(?!none)|vessel|style|stage|cue:(variety|molecular|wine|target))/.test(
+            tag,
+          ),
+        )),
+  );
+  return !others && board.terms.some((_, k) => isStranger(board, k) || isCue(board, k, 'pronoun'));
+}
+
 function findLabel(board: Board, i: number, label: LabelId): void {
   const after = figureAfter(board, i);
   const volumeTaken = isForeignAfter(board, i);
@@ -41,11 +65,15 @@ function findLabel(board: Board, i: number, label: LabelId): void {
     return;
   }
   if (!beside) {
+    if (label === 'total' && isCue(board, i + 1, 'of')) return;
     if (volumeTaken !== undefined && label !== 'so2' && label !== 'volume' && label !== 'sugar')
       mismatch(board, i, volumeTaken);
     return;
   }
   const [from, to] = [Math.min(i, figureAt(board, beside.at).from), Math.max(i, beside.to)];
+  if (isCue(board, i - 1, 'not') && beside.at > i) return refuse(board, 'ambiguous-number', i - 1, to);
+  if (isLimit(board, i, beside)) return setAside(board, from, to);
+  if (isSmallTalk(board, label, beside)) return;
   if (hasForeignUnit(board, beside.at)) {
     if (label !== 'volume' && label !== 'so2') refuse(board, 'unit-mismatch', from, to + 1);
     return;
@@ -97,10 +125,24 @@ function mismatch(board: Board, i: number, index: number): void {
   refuse(board, 'unit-mismatch', i, finding.to);
 }
 
+/** `free should be 30`: a wish. Of free SO2 it is the target; of anything else it is set aside. */
+function findWish(board: Board, i: number): boolean {
+  const label = labelAt(board, i);
+  if (label === undefined || !isCue(board, i + 1, 'should')) return false;
+  const at = isCue(board, i + 2, 'is') ? i + 3 : i + 2;
+  if (!isFree(board, at)) return false;
+  const to = concentrationAt(board, at + 1)?.to ?? at;
+  if (label === 'free' || label === 'so2')
+    find(board, 'target', { free_mg_L: figureAt(board, at).value }, 'labelled', i, to);
+  else setAside(board, i, to);
+  return true;
+}
+
 /** Finds the figures that a label before or after them names. */
 export function findLabelled(board: Board): void {
   for (const weak of [false, true]) {
     for (let i = 0; i < board.terms.length; i++) {
+      if (findWish(board, i)) continue;
       const label = labelAt(board, i);
       if (label !== undefined && (label === 'so2' || label === 'volume') === weak) findLabel(board, i, label);
     }

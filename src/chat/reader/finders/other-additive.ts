@@ -21,6 +21,14 @@ function refuseWord(board: Board, i: number): void {
   refuse(board, 'unknown-additive', i, i);
 }
 
+const isSulfateWord = (board: Board, i: number): boolean =>
+  board.terms[i]?.kind === 'word' &&
+  board.terms[i].tags.length === 0 &&
+  CHEMICAL_SLIP.test(board.terms[i].text);
+
+const isStrangerIn = (board: Board, i: number): boolean =>
+  board.terms[i]?.kind === 'word' && board.taken[i] !== true;
+
 const isPlainWord = (board: Board, i: number): boolean => {
   const term = board.terms[i];
   return term?.kind === 'word' && board.taken[i] !== true && term.tags.length === 0 && term.text.length >= 3;
@@ -31,17 +39,22 @@ export function findOtherAdditive(board: Board): void {
   const amount =
     findingOf(board, 'mass_g') ?? findingOf(board, 'additive_volume_mL') ?? findingOf(board, 'rate_mg_L');
   const named = isFound(board, 'additive') || board.marks.unnamedAdditive === true;
-  const isNone = (i: number): boolean => hasTag(board, i, 'additive:none') && board.taken[i] !== true;
+  const isNone = (i: number): boolean =>
+    board.taken[i] !== true &&
+    (hasTag(board, i, 'additive:none') || hasTag(board, i, 'label:aside') || isSulfateWord(board, i));
   if (amount) {
     const after = placeAfter(board, amount.to);
     const before = isBetween(board, amount.from - 1) ? amount.from - 2 : amount.from - 1;
-    if (isNone(after)) return refuseWord(board, after);
+    const bag = isCue(board, amount.to + 1, 'bag');
+    if (isNone(after) || (bag && isStrangerIn(board, after))) return refuseWord(board, after);
     if (isNone(before)) return refuseWord(board, before);
     if (!named && isPlainWord(board, after) && after <= amount.to + 2 && !isBetween(board, after))
       return refuseWord(board, after);
   }
   if (named) return;
-  const anywhere = board.terms.findIndex((_, i) => isNone(i));
+  const anywhere = board.terms.findIndex(
+    (_, i) => board.taken[i] !== true && (hasTag(board, i, 'additive:none') || isSulfateWord(board, i)),
+  );
   if (anywhere < 0) return;
   const isWick = isCue(board, anywhere, 'wick') && isFound(board, 'vessel');
   const counted = isWick || board.terms[anywhere - 1]?.kind === 'number';

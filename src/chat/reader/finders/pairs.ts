@@ -1,5 +1,17 @@
 import type { Board } from '../board.ts';
-import { decimalAt, figureAt, find, hasTag, isFound, isFree, isMark, refuse, termAt } from '../board.ts';
+import {
+  decimalAt,
+  figureAt,
+  find,
+  hasTag,
+  isFound,
+  isFree,
+  isMark,
+  refuse,
+  setAside,
+  termAt,
+} from '../board.ts';
+import { strangerBefore } from '../stranger.ts';
 import { concentrationAt } from '../units.ts';
 
 /** Below this ratio the second figure may be the next mark of a scale, not the total. */
@@ -46,7 +58,11 @@ const isFreeBefore = (board: Board, i: number): boolean =>
 export function findPairs(board: Board): void {
   for (let i = 0; i < board.terms.length; i++) {
     if (!isFree(board, i) || !isSlash(board, i + 1) || !isFree(board, i + 2)) continue;
-    if (isPhLike(board, i) && !isFound(board, 'ph')) {
+    const stranger = board.findings.some(({ said }) => said === 'labelled')
+      ? strangerBefore(board, i)
+      : undefined;
+    if (stranger !== undefined && !isNamed(board, i, i + 2)) setAside(board, stranger, i + 2);
+    else if (isPhLike(board, i) && !isFound(board, 'ph')) {
       const three = isSlash(board, i + 3) && isFree(board, i + 4);
       find(board, 'ph', decimalAt(board, i).value, 'labelled', i, i);
       if (three) findFreeAndTotal(board, i + 2, i);

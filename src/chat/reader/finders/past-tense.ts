@@ -1,8 +1,13 @@
 import type { Board } from '../board.ts';
-import { isCue, isMark } from '../board.ts';
+import { holdsCue, isCue, isMark } from '../board.ts';
 
 /** Whether a cue stands somewhere between two terms. */
-function cueBetween(board: Board, from: number, to: number, cue: 'not' | 'if' | 'not-yet'): boolean {
+function cueBetween(
+  board: Board,
+  from: number,
+  to: number,
+  cue: 'not' | 'if' | 'not-yet' | 'should',
+): boolean {
   for (let k = Math.max(0, from); k < to; k++) if (isCue(board, k, cue)) return true;
   return false;
 }
@@ -23,7 +28,8 @@ function isFact(board: Board, i: number): boolean {
     !cueBetween(board, i - 5, i, 'not') &&
     !saysNo(board, i) &&
     !cueBetween(board, 0, i, 'if') &&
-    !cueBetween(board, 0, i, 'not-yet')
+    !cueBetween(board, 0, i, 'not-yet') &&
+    !cueBetween(board, 0, i, 'should')
   );
 }
 
@@ -32,7 +38,11 @@ export function findPastTense(board: Board): void {
   if (board.marks.pastLine) board.pastTense = true;
   const declined = board.terms.some((_, i) => isCue(board, i, 'add') && declines(board, i));
   if (declined) board.notes.push({ id: 'negated', text: '' });
-  const said = board.terms.findIndex((_, i) => board.taken[i] !== true && isCue(board, i, 'past'));
+  const said = board.terms.findIndex(
+    (_, i) =>
+      board.taken[i] !== true &&
+      (isCue(board, i, 'past') || (isCue(board, i, 'put') && holdsCue(board, 'past-time'))),
+  );
   if (said < 0 || declined) return;
   board.pastTense = isFact(board, said);
   const negated = cueBetween(board, said - 5, said, 'not') || saysNo(board, said);

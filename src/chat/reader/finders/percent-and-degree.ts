@@ -1,16 +1,38 @@
 import { celsiusFrom } from '../../../core/units/temperature.ts';
 import type { Board } from '../board.ts';
-import { figureAt, find, hasTag, isCue, isFree, isMark, refuse, termAt } from '../board.ts';
+import { figureAt, find, hasTag, isCue, isFree, isMark, refuse, termAt, setAside } from '../board.ts';
+import { isStranger } from '../stranger.ts';
 
 const isPercent = (board: Board, i: number): boolean => isMark(board, i, '%') || isCue(board, i, 'percent');
 
 const unitOf = (board: Board, i: number): 'C' | 'F' | undefined =>
   hasTag(board, i, 'unit:C') ? 'C' : hasTag(board, i, 'unit:F') ? 'F' : undefined;
 
+/** Two shares with a grape each are a blend. */
+const isBlend = (board: Board): boolean => board.terms.filter((_, k) => isPercent(board, k)).length > 1;
+
+/** `20% Merlot`, `15% headspace`, `discount 15%`, `citric 5%`: a share of something else. */
+const isOfOther = (board: Board, i: number): boolean =>
+  isStranger(board, i - 1) ||
+  isCue(board, i - 1, 'share-word') ||
+  hasTag(board, i - 1, 'additive:none') ||
+  isStranger(board, i + 2) ||
+  (isCue(board, i + 2, 'variety') &&
+    (isBlend(board) || figureAt(board, i).value < 10 || figureAt(board, i).value > 17)) ||
+  isCue(board, i + 2, 'share-word') ||
+  isCue(board, i + 2, 'of') ||
+  (isCue(board, i + 2, 'plain') && isStranger(board, i + 3) && !isMark(board, i + 2, ','));
+
 /** `13.5%`, `13.5 % vol`, `13,5° alc`: an unlabelled % from 5 to 22 is alcohol. */
 function findPercent(board: Board, i: number): void {
   const { value } = figureAt(board, i);
   const vol = hasTag(board, i + 2, 'label:volume') || hasTag(board, i + 2, 'label:alcohol');
+  if (!vol && isOfOther(board, i))
+    return setAside(
+      board,
+      isStranger(board, i - 1) || hasTag(board, i - 1, 'additive:none') ? i - 1 : i,
+      isStranger(board, i + 2) || isCue(board, i + 2, 'variety') ? i + 2 : i + 1,
+    );
   if (vol || (value >= 5 && value <= 22))
     find(board, 'alcohol_percent', value, vol ? 'labelled' : 'unit', i, vol ? i + 2 : i + 1);
   else refuse(board, 'ambiguous-number', i, i + 1);
@@ -22,6 +44,7 @@ function findDegrees(board: Board, i: number): void {
   const at = sign ? i + 2 : i + 1;
   const unit = unitOf(board, at);
   const { value, from } = figureAt(board, i);
+  if (unit && (isCue(board, i - 1, 'to') || isCue(board, i - 1, 'target'))) return setAside(board, i - 1, at);
   if (unit === 'F' && !sign && termAt(board, at).gap && value < 40) return;
   if (unit) find(board, 'temperature_C', celsiusFrom(value, unit), 'unit', from, at);
   else if (sign && hasTag(board, at, 'label:alcohol'))

@@ -42,7 +42,8 @@ const isLabelled = (board: Board, i: number): boolean => {
 export function findPowderOrSO2(board: Board): void {
   for (let i = 0; i < board.terms.length; i++) {
     const unit = isFree(board, i) ? concentrationAt(board, i + 1) : undefined;
-    if (!unit || isLabelled(board, i)) continue;
+    if (!unit || isLabelled(board, i) || board.terms[unit.to + 1]?.tags.includes('additive:none') === true)
+      continue;
     const after = isCue(board, unit.to + 1, 'of') ? unit.to + 2 : unit.to + 1;
     const before = isMark(board, i - 1, ':') ? i - 2 : i - 1;
     const beside =

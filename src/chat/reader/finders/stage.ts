@@ -1,5 +1,6 @@
 import type { Stage } from '../../../core/wine.ts';
 import type { Board } from '../board.ts';
+import { isStranger } from '../stranger.ts';
 import { claim, find, hasTag, isCue, isMark, termAt } from '../board.ts';
 
 const STAGES: readonly Stage[] = ['fermenting', 'malolactic', 'must', 'base', 'bottled', 'finished'];
@@ -33,6 +34,7 @@ function isNounMust(board: Board, i: number): boolean {
     (tag) => /^unit:(L|hL|m3|gal)/.test(tag) || tag === 'cue:fruit' || tag === 'cue:of',
   );
   if (measured && isCue(board, i + 1, 'add')) return true;
+  if (!measured && isStranger(board, i + 1)) return false;
   if (
     isCue(board, i + 1, 'verb') &&
     !isCue(board, i + 1, 'plain') &&

@@ -1,6 +1,7 @@
 import type { Board } from '../board.ts';
-import { hasTag, holdsCue, isCue, isMark, refuse, termAt } from '../board.ts';
+import { hasTag, holdsCue, isCue, isFree, isMark, refuse, setAside, termAt } from '../board.ts';
 import { isCellarTalk } from '../cellar-talk.ts';
+import { isStranger } from '../stranger.ts';
 import { concentrationAt } from '../units.ts';
 import type { Aim } from './aim.ts';
 import { aimAt, isArrow, keepAddition, keepTarget, kindAt, skipJoins } from './aim.ts';
@@ -14,25 +15,61 @@ function governed(board: Board, i: number): { aim: Aim; label?: Aim['kind'] } | 
   return aim && { aim, ...(label ? { label } : {}) };
 }
 
+/** A bare figure is an aim only where the message speaks of wine and nothing foreign stands beside it. */
+function isClear(board: Board, i: number, { aim, label }: { aim: Aim; label?: Aim['kind'] }): boolean {
+  if (aim.kind !== undefined || label !== undefined || concentrationAt(board, aim.from + 1)) return true;
+  const after = aim.to + 1;
+  if (isStranger(board, after) || (isCue(board, after, 'from') && !isFree(board, after + 1))) return false;
+  return isCellarTalk(board) && !isOtherVerb(board, i);
+}
+
+/** `chill to 30`, `TA up 1.5`, `drop pH to 3.5`: the figure belongs to what stands before the verb. */
+function isOtherVerb(board: Board, i: number): boolean {
+  const to = isCue(board, i, 'to') && !isCue(board, i, 'target');
+  const near = [i - 1, i + 1].some(
+    (k) => hasTag(board, k, 'label:aside') || hasTag(board, k, 'label:temperature'),
+  );
+  return (
+    near ||
+    (to &&
+      (isStranger(board, i - 1) || isCue(board, i - 1, 'vessel-statement') || isCue(board, i - 1, 'lot')))
+  );
+}
+
+/** `don't add`, `not to 30`, `don't go to 30`: the negation stands right before, or one word before. */
+const declines = (board: Board, i: number): boolean =>
+  isCue(board, i - 1, 'not') ||
+  (isCue(board, i - 2, 'not') && (isCue(board, i - 1, 'to') || isCue(board, i - 1, 'verb')));
+
 function findVerb(board: Board, i: number): void {
   if (isCue(board, i, 'need') && isCue(board, i + 1, 'to')) return;
   const found = governed(board, i);
   if (!found) return;
   const { aim, label } = found;
-  const isPlain = aim.kind === undefined && label === undefined;
-  if (isArrow(board, i) || isCue(board, i, 'target')) return keepTarget(board, aim, i, label);
-  if (isCue(board, i, 'need')) {
-    const more = isCue(board, aim.to + 1, 'addition') || isCue(board, aim.to + 1, 'past');
-    if (more) return keepAddition(board, { ...aim, to: aim.to + 1 }, i);
-    return isPlain || (label === undefined && aim.kind === undefined)
-      ? refuse(board, 'ambiguous-number', i, aim.to)
-      : keepTarget(board, aim, i, label);
+  if (declines(board, i)) return refuse(board, 'ambiguous-number', i - 1, aim.to);
+  if (hasTag(board, i - 1, 'label:ph')) return refuse(board, 'ambiguous-number', i - 1, aim.to);
+  if (!isClear(board, i, found)) {
+    const asks = isCue(board, i, 'to') && isCellarTalk(board);
+    if (asks) return refuse(board, 'ambiguous-number', i - 1, aim.to);
+    return setAside(board, i, isStranger(board, aim.to + 1) ? aim.to + 1 : aim.to);
   }
+  const glued = isArrow(board, i) && !termAt(board, i).gap && !termAt(board, i + 1).gap;
+  if (glued && hasTag(board, i - 1, 'label:free')) return refuse(board, 'ambiguous-number', i - 1, aim.to);
+  if (isArrow(board, i) || isCue(board, i, 'target')) return keepTarget(board, aim, i, label);
+  if (isCue(board, i, 'need')) return findNeed(board, i, found);
   if (isCue(board, i, 'add') || isCue(board, i, 'raise') || isCue(board, i, 'by'))
     return keepAddition(board, aim, i);
-  const isPlainTo = aim.kind === undefined && label === undefined && !concentrationAt(board, aim.from + 1);
-  if (isPlainTo && !isCellarTalk(board)) return;
   if (isCue(board, i, 'to')) keepTarget(board, aim, i, label);
+}
+
+/** `needs 25 ppm` could be a level or an addition; `needs 25 more`, `wants 30 free` are clear. */
+function findNeed(board: Board, i: number, { aim, label }: { aim: Aim; label?: Aim['kind'] }): void {
+  const more = isCue(board, aim.to + 1, 'addition') || isCue(board, aim.to + 1, 'past');
+  if (more && !isStranger(board, aim.to + 2) && !hasTag(board, aim.to + 2, 'unit:none-of-ours'))
+    return keepAddition(board, { ...aim, to: aim.to + 1 }, i);
+  if (more) return setAside(board, i, aim.to + 2);
+  if (label === undefined && aim.kind === undefined) return refuse(board, 'ambiguous-number', i, aim.to);
+  keepTarget(board, aim, i, label);
 }
 
 const isVerb = (board: Board, i: number): boolean =>
@@ -44,7 +81,7 @@ const isVerb = (board: Board, i: number): boolean =>
 function findPlus(board: Board, i: number): void {
   const opens = termAt(board, i).gap || board.terms[i - 1]?.kind !== 'number';
   const aim = opens && board.terms[i + 1]?.gap === false ? aimAt(board, i + 1) : undefined;
-  if (aim) keepAddition(board, aim, i);
+  if (aim && isClear(board, i, { aim })) keepAddition(board, aim, i);
 }
 
 /** Finds what a verb, an arrow or a plus sign aims at: a level of SO2, or a stated addition. */

@@ -100,6 +100,17 @@ function coded(board: Board, i: number): Named | undefined {
     return undefined;
   if (isCue(board, i, 'times') || (hasOwnUnit(board, k) && !glued)) return undefined;
   if (glued && !hyphen && single && hasOwnUnit(board, k) && isMark(board, k + 1, '/')) return undefined;
+  // `K2CO3`, `E211`: a formula or a number of an additive is no vessel.
+  const tail = board.terms[k + 1];
+  if (
+    tail?.kind === 'word' &&
+    !tail.gap &&
+    tail.text.length > 1 &&
+    tail.tags.length === 0 &&
+    !hasOwnUnit(board, k)
+  )
+    return undefined;
+  if (word.text === 'e' && /^\d{3}$/.test(termAt(board, k).text)) return undefined;
   const { letter, to } = suffix(board, k);
   const number = Number(termAt(board, k).text);
   const prefix = tank && !letter ? 'tank ' : barrel ? 'barrel ' : `${word.text.toUpperCase()}`;

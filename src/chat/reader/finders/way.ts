@@ -1,4 +1,6 @@
 import type { Board } from '../board.ts';
+import { isCellarTalk } from '../cellar-talk.ts';
+import { concentrationAt } from '../units.ts';
 import { find, isCue, isFree, isMark, refuse } from '../board.ts';
 import { MOST_BARE_MOLECULAR_mg_L, aimAt, isArrow, keepTarget, kindAt, skipJoins } from './aim.ts';
 
@@ -23,6 +25,15 @@ function findWayAt(board: Board, i: number): boolean {
     refuse(board, 'ambiguous-number', i, second.to);
     return true;
   }
+  if (isCue(board, i - 1, 'lately')) {
+    refuse(board, 'ambiguous-number', i - 1, second.to);
+    return true;
+  }
+  const firm =
+    before !== undefined ||
+    arrow ||
+    [first, second].some(({ from }) => concentrationAt(board, from + 1) !== undefined);
+  if (!firm && !isCellarTalk(board)) return false;
   const said = isCue(board, i - 1, 'from') || isCue(board, labelAt - 1, 'from');
   const start = isCue(board, i - 1, 'from') ? i - 1 : before ? labelAt : i;
   if (second.kind === 'molecular') {

@@ -1,6 +1,7 @@
 import type { Board } from '../board.ts';
-import { findingOf, holdsCue, isCue, isFound, isMark } from '../board.ts';
+import { findingOf, hasTag, holdsCue, isCue, isFound, isMark } from '../board.ts';
 import type { Intent } from '../understood.ts';
+import { isStranger } from '../stranger.ts';
 import { isCellarTalk } from '../cellar-talk.ts';
 
 const any = (board: Board, ...fields: readonly Parameters<typeof isFound>[1][]): boolean =>
@@ -62,6 +63,15 @@ function isReading(board: Board): boolean {
     !isMark(board, board.terms.length - 1, '?')
   );
 }
+
+/** `5G signal is down`: a mass with nothing of a cellar about it, among unknown words. */
+const isIdleMass = (board: Board): boolean =>
+  !hasVolume(board) &&
+  !hasAdditive(board) &&
+  !hasVessel(board) &&
+  !any(board, 'ph', 'free_mg_L') &&
+  !board.terms.some((_, i) => hasTag(board, i, 'additive:none')) &&
+  board.terms.some((_, i) => isStranger(board, i));
 
 function isEffect(board: Board): boolean {
   if (any(board, 'rate_mg_L') || board.marks.fruitRate) return true;
@@ -129,11 +139,21 @@ const aimsAtLevel = (board: Board): boolean => {
   return target !== undefined && !('add_mg_L' in target);
 };
 
+/** `order 5 kg kmbs`, `500 g kmbs left`: the store, and no wine. */
+const isTrade = (board: Board): boolean =>
+  (holdsCue(board, 'buy') || holdsCue(board, 'in-store')) &&
+  hasAmount(board) &&
+  !hasVolume(board) &&
+  !hasVessel(board) &&
+  !any(board, 'ph', 'free_mg_L');
+
 /** What a message wants. With nothing that is ours it is chat. */
 export function decideIntent(board: Board): Intent {
   if (isSolution(board)) return 'solution';
   if (isAdded(board)) return 'added';
   if (isNegated(board) && !any(board, 'ph', 'free_mg_L') && !aimsAtLevel(board)) return 'chat';
+  if (isTrade(board)) return 'chat';
+  if (hasAmount(board) && isIdleMass(board)) return 'chat';
   if (isReading(board)) return 'reading';
   if (isEffect(board)) return 'effect';
   if (isDose(board)) return 'dose';

@@ -13,6 +13,7 @@ import {
   termAt,
 } from '../board.ts';
 import { isCellarTalk } from '../cellar-talk.ts';
+import { isStranger, strangerBefore } from '../stranger.ts';
 import { concentrationAt, mg_L_IN } from '../units.ts';
 
 /** A figure without the word free is free SO2 up to this; above it may be total (mg/L). */
@@ -132,6 +133,9 @@ function findFree(board: Board, candidates: readonly number[]): void {
       );
 }
 
+/** … and how many where none of the figures could be a pH. */
+const MOST_CHATTER_WITHOUT_PH = 2;
+
 /** How many ordinary words a message may hold beside bare figures and still be a reading. */
 const MOST_CHATTER = 5;
 
@@ -154,7 +158,8 @@ function isChatter(board: Board): boolean {
       (term.tags.length === 0 ||
         term.tags.every((tag) => tag === 'cue:plain' || tag === 'cue:verb' || tag === 'cue:pronoun')),
   ).length;
-  return strange >= MOST_CHATTER;
+  const phLike = board.terms.some((_, i) => isFree(board, i) && isPhLike(board, i));
+  return strange >= (phLike ? MOST_CHATTER : MOST_CHATTER_WITHOUT_PH);
 }
 
 const holdsAim = (board: Board): boolean =>
@@ -171,10 +176,53 @@ function setCountsAside(board: Board): void {
   }
 }
 
+/** `v3.2`: a letter glued to its figure. */
+const isGluedToWord = (board: Board, i: number): boolean =>
+  !termAt(board, i).gap &&
+  termAt(board, i - 1).kind === 'word' &&
+  board.taken[i - 1] !== true &&
+  termAt(board, i - 1).tags.length === 0;
+
+/** `pallet 18`, `crew of 18`, `cost 12`: a known word whose figure is none of the wine's. */
+function otherMatterBefore(board: Board, i: number): number | undefined {
+  const at = isCue(board, i - 1, 'of') ? i - 2 : i - 1;
+  const other = (['lot', 'limit', 'buy', 'bag', 'bottle-unit', 'in-store'] as const).some((cue) =>
+    isCue(board, at, cue),
+  );
+  return (other && !isCue(board, at, 'is')) || termAt(board, at).tags.includes('unit:none-of-ours')
+    ? at
+    : undefined;
+}
+
+/** The word before a figure that makes it none of the wine's, if one does. */
+function matterBefore(board: Board, i: number, labelled: boolean): number | undefined {
+  if (isGluedToWord(board, i)) return i - 1;
+  return (labelled ? strangerBefore(board, i) : undefined) ?? otherMatterBefore(board, i);
+}
+
+/** Who labels one figure labels the others: then a bare one beside an unknown word is that word's (`hose 18`, `18 pumpovers`). */
+function setStrangersAside(board: Board): void {
+  const labelled = board.findings.some(
+    ({ field, said }) =>
+      said === 'labelled' && (field === 'ph' || field === 'free_mg_L' || field === 'total_mg_L'),
+  );
+  for (let i = 0; i < board.terms.length; i++) {
+    if (!isFree(board, i)) continue;
+    const to = concentrationAt(board, i + 1)?.to ?? i;
+    const before = matterBefore(board, i, labelled);
+    if (before !== undefined) setAside(board, before, to);
+    else if (isStranger(board, to + 1) && (labelled || isPhLike(board, i))) setAside(board, i, to + 1);
+    else if (isCue(board, i - 1, 'not')) refuse(board, 'ambiguous-number', i - 1, to);
+    else if (isMark(board, i - 1, '<') || isMark(board, i - 1, '>'))
+      refuse(board, 'ambiguous-number', i - 1, to);
+  }
+}
+
 /** Reads the figures that nothing names: one as the pH, one as the free SO2; else it asks. */
 export function readUnlabelled(board: Board): void {
   if (!isCellarTalk(board) || isChatter(board)) return;
   setCountsAside(board);
+  setStrangersAside(board);
   const candidates = board.terms.map((_, i) => i).filter((i) => isFree(board, i));
   findPh(board, candidates);
   findFree(board, candidates);

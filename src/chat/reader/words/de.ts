@@ -6,6 +6,12 @@ export const de: Words = {
   groups: '.',
   says: {},
   danger: {
+    unwell: ['schwindlig', 'schwindelig', 'schwindel', 'ubel', 'ubelkeit', 'erbricht', 'hustet', 'hustet nur noch', 'dampfe'],
+    mixed: ['gemischt', 'zusammengeschuttet', 'verschuttet', 'vermischt'],
+    reactive: ['chlor', 'chlorreiniger', 'bleiche', 'javelwasser', 'saure'],
+    smell: ['riecht', 'gestank', 'stinkt', 'geruch'],
+    place: ['keller', 'raum', 'halle', 'uberall', 'nicht auszuhalten'],
+    skin: ['auf den handen', 'auf der hand', 'auf die hande', 'auf die hand', 'auf dem arm', 'auf der haut'],
     down: [
       'zusammengebrochen', 'zusammengeklappt', 'bewusstlos', 'ohnmachtig', 'in ohnmacht', 'umgekippt',
       'umgefallen', 'ohne bewusstsein', 'bewegt sich nicht', 'bewegt sich nicht mehr', 'wacht nicht auf',

@@ -70,18 +70,16 @@ export const en: Words = {
       'volatile', 'acidity', 'brix', 'bx', 'turbidity', 'ntu', 'malic', 'malic acid', 'lactic', 'lactic acid',
       'yan', 'density', 'sg', 'specific gravity', 'gravity', 'o2', 'dissolved oxygen', 'oxygen', 'co2',
       'color', 'colour', 'abs', 'a420', 'ipt', 'baume', 'acetic', 'acetic acid', 'bound', 'bound so2',
-      'lab no', 'lab number', 'ext', 'cold stab', 'og', 'fg',
-    ],
+      'lab no', 'lab number', 'ext', 'cold stab', 'og', 'fg', 'd o', 'diss oxygen', 'dissolved o2', 'iron', 'fe', 'cu', 'copper', 'potassium', 'calcium', 'magnesium', 'sodium', 'chlorine', 'chloride', 'histamine', 'lead', 'tannin', 'tannins', 'nitrate', 'nitrogen', 'ammonia', 'nh3', 'ethyl acetate', 'acetaldehyde', 'h2s', 'hardness', 'conductivity', 'orp', 'redox', 'fan', 'nopa', 'yanc', 'amino n', 'amino nitrogen', 'free amino nitrogen', 'free amino n', 'alpha amino', 'assimilable nitrogen', 'phenolics', 'total phenolics', 'phenols', 'total phenols', 'anthocyanins', 'anthocyanin', 'total anthocyanins', 'glycerol', 'tartaric', 'citric', 'succinic', 'gluconic', 'laccase', 'protein', 'heat stab', 'buffer', 'phi', 'rh', 'humidity', 't a', 'v a', 'extract', 'dry extract', 'sulfate', 'sulphate', 'sorbic', 'sorbate level', 'microns', 'cells', 'cell count', 'viability', 'brett', '4ep', '4eg', 'geosmin', 'tca', 'total cost', 'total acids', 'total n', 'total nitrogen', 'free n', 'total extract', 'cold stability', 'hue', 'intensity', 'absorbance', 'od', 'optical density', 'fso3'],
     'cue:target': [
       'target', 'targt', 'tgt', 'targets', 'targeting', 'aim', 'aims', 'aiming', 'aim for', 'aiming for',
       'goal', 'shoot for', 'shooting for', 'go for', 'going for', 'get to', 'get it to', 'bring to',
       'bring it to', 'up to', 'raise to', 'raise it to', 'bump to', 'bump it to', 'take to', 'take it to',
       'set to', 'adjust to', 'want it at', 'want at', 'want to be at', 'bring up to', 'bring it up to',
       'get it up to', 'up it to', 'hold at', 'hold it at', 'lift to', 'lift it to', 'target of', 'target is',
-      'aim at', 'correct to', 'top up to', 'dose to', 'increase to', 'set at',
-    ],
+      'aim at', 'correct to', 'top up to', 'dose to', 'increase to', 'set at', 'desired', 'ideal', 'optimal', 'ideally', 'hit', 'to hit', 'reach', 'to reach', 'get up to', ],
     'cue:to': ['to'],
-    'cue:from': ['from'],
+    'cue:from': ['from', 'dropped from', 'fell from', 'went from', 'down from', 'came down from', 'gone from'],
     'cue:raise': [
       'raise by', 'up by', 'bump by', 'bump it by', 'raise it by', 'increase by', 'increase it by', 'lift by',
       'lift it by', 'bring up by', 'bring it up by', 'up it by', 'go up by', 'go up', 'bump', 'raise', 'up',
@@ -154,15 +152,13 @@ export const en: Words = {
       'already put', 'has put', 'i put in', 'we put in', 'he put', 'she put', 'they put', 'finished adding', 'done adding', 'have now added', 'has been added', 'been added', 'have dosed'],
     'cue:if': [
       'if', 'what if', 'would', "i'd", 'suppose', 'supposing', 'say i', 'should i', 'could', 'might',
-      'were to', 'shall i', 'assuming', 'in case', 'can i', 'unless', 'had i', 'when i have',
-    ],
+      'were to', 'shall i', 'assuming', 'in case', 'can i', 'unless', 'had i', 'when i have', 'once', 'when', 'as soon as', 'before we', 'until we', 'after we have'],
     'cue:not': [
       "haven't", 'havent', 'have not', "hasn't", 'hasnt', 'has not', 'not', 'never', "didn't", 'didnt',
       'did not', "wasn't", 'wasnt', 'was not', 'nothing', 'nobody', 'no one', 'forgot to', 'forgot', 'yet to',
       'no kmbs', 'no so2', 'without', "won't", 'wont', "weren't", 'none', "hadn't", 'hadnt', 'instead of',
       'nobody has', "don't", 'dont', 'do not', 'no sulfite', 'cancel', 'no addition', 'no meta', 'had not',
-      'no sulfur',
-    ],
+      'no sulfur', "isn't", 'isnt', "aren't", 'arent', "ain't", "wouldn't", "shouldn't", 'nearly', 'almost', 'supposed to have', 'meant to have', 'meant to', 'should have', 'ought to have', 'would have', 'about to have'],
     'cue:not-yet': [
       'to be', 'be', 'needs', 'need', 'gets', 'get', 'want', 'wants', 'being', 'will', 'going to', "i'll",
       'ill', "we'll", 'tomorrow', 'must be', 'about to', 'plan to', 'planning to', 'to get', 'not yet',
@@ -181,9 +177,7 @@ export const en: Words = {
       'need a dose', 'calc', 'work out', 'what would i need', 'how much more', 'what do i dose',
     ],
     'cue:reading': [
-      'reading', 'readings', 'now', 'measured', 'measure', 'measurement', 'tested', 'lab', 'lab result',
-      'lab results', 'results', 'result', 'fyi', 'for the record', 'just measured', 'logged', 'note',
-      'todays reading', "today's reading", 'new reading', 'current reading',
+      'reading', 'readings', 'now', 'measured', 'measurement',       'fyi', 'for the record', 'just measured',       'todays reading', "today's reading", 'new reading', 'current reading',
     ],
     'cue:vessel-statement': [
       'racked', 'moved', 'transferred', 'topped', 'pumped over', 'emptied', 'empty', 'cleaned', 'filled',
@@ -351,6 +345,16 @@ export const en: Words = {
     'cue:per-barrel': ['per barrel', 'per bbl'],
     'cue:rises-too': ['rose'],
     'cue:tap-too': ['port'],
+    'cue:should': ['should be', 'needs to be', 'need to be', 'must be', 'ought to be', 'has to be', 'wants to be', 'should read', 'should sit at', 'should go to', 'wanted at', 'supposed to be', 'to be'],
+    'cue:limit': ['max', 'maximum', 'limit', 'legal', 'legal max', 'legal limit', 'legally', 'under', 'below', 'keep under', 'keep below', 'above', 'over', 'less than', 'more than', 'at most', 'at least', 'min', 'minimum', 'ceiling', 'cap'],
+    'cue:sample-word': ['sample', 'samples', 'aliquot', 'titrated', 'titrant', 'burette', 'pipette', 'pipetted', 'took', 'bottle', 'bottles', 'used', 'ripper', 'drawn', 'vial', 'vials', 'beaker', 'flask'],
+    'cue:past-time': ['this morning', 'yesterday', 'last night', 'earlier', 'already', 'earlier today', 'this afternoon', 'an hour ago', 'last week', 'before lunch', 'after lunch', 'ago'],
+    'cue:put': ['put'],
+    'cue:bag': ['bag of', 'bags of', 'sack of', 'sacks of', 'box of', 'boxes of', 'pail of', 'drum of', 'bags', 'sacks'],
+    'cue:buy': ['order', 'buy', 'bought', 'ordered', 'invoice', 'invoiced', 'delivered', 'delivery', 'purchase', 'received', 'ship', 'shipped'],
+    'cue:lately': ['dropped from', 'fell from', 'went from', 'down from', 'came down from', 'gone from', 'has gone from'],
+    'cue:share-word': ['off', 'of', 'new', 'more', 'less', 'extra', 'bigger', 'smaller', 'loss', 'fraction', 'discount', 'blend', 'topping', 'press', 'over', 'under', 'headspace', 'ullage', 'stems', 'higher', 'lower', 'up', 'down'],
+    'cue:clothes-size': ['size', 'sizes'],
     'cue:greeting': [
       'hi', 'hello', 'hey', 'good morning', 'morning', 'good afternoon', 'good evening', 'evening', 'yo',
       'hiya', 'howdy', 'gday', "g'day", 'hallo', 'hi there', 'hey there', 'greetings', 'afternoon', 'sup',
@@ -390,8 +394,7 @@ export const en: Words = {
       'recipe', 'based', 'cellar', 'crew', 'where', 'full', 'stock', 'bring', 'out', 'up', 'onto', 'gently',
       'back', 'off', 'split', 'between', 'came', 'they', 'he', 'she', 'them', 'last', 'night', 'week',
       'monday', 'tuesday', 'wednesday', 'thursday', 'friday', 'saturday', 'sunday', 'early', 'earlier', 'late',
-      'shift', 'first', 'second', 'third', 'next',
-    ],
+      'shift', 'first', 'second', 'third', 'next', 'crush pad', 'before crush', 'after crush', 'crush starts'],
     'vessel:tank': [
       'tank', 'tnk', 'tk', 'tq', 'tanks', 'tks', 'vat', 'cuve', 'cuba', 'vasca', 'deposito', 'dep', 'tanque',
       'pileta', 'serbatoio', 'autoclave', 'cuves', 'tanl', 'takn', 'tamk', 'tanck', 'depositos', 'tanques',
@@ -437,10 +440,9 @@ export const en: Words = {
       'ecologico', 'biologico',
     ],
     'stage:must': [
-      'must', 'juice', 'crush', 'musts', 'destemmed', 'crushed', 'pressed juice', 'free run juice', 'grapes',
-      'at crush', 'at the crusher', 'crusher', 'just crushed', 'free run', 'press juice', 'crushed fruit',
-      'crushing', 'vendange',
-    ],
+      'must', 'juice', 'musts', 'destemmed', 'crushed', 'pressed juice', 'free run juice', 'grapes',
+      'at crush', 'at the crusher', 'crusher', 'just crushed', 'press juice', 'crushed fruit',
+      'crushing', 'vendange', 'in crush', 'crush'],
     'stage:fermenting': [
       'fermenting', 'ferment', 'ferments', 'still bubbling', 'still fermenting', 'stuck', 'restart',
       'restarting', 'stuck ferment', 'stuck fermentation', 'bubbling', 'in ferment', 'in fermentation',
@@ -449,8 +451,7 @@ export const en: Words = {
       'restarted', 'primary',
     ],
     'stage:base': [
-      'base wine', 'base', 'tirage', 'for tirage', 'sparkling base', 'base wines', 'base for sparkling',
-      'base cuvee', 'pre tirage',
+      'base wine', 'base', 'tirage', 'for tirage', 'base wines',       'base cuvee', 'pre tirage',
     ],
     'stage:bottled': ['bottled', 'in bottle', 'in bottles', 'in the bottle', 'already bottled'],
     'additive:potassium-metabisulfite': [
@@ -532,16 +533,22 @@ export const en: Words = {
       'concentrate', 'percarbonate', 'caustic', 'soda ash', 'peracetic', 'pbw', 'proxycarb', 'k bicarb',
       'bicarb', 'khco3', 'thiosulfate', 'sodium thiosulfate', 'potassium thiosulfate', 'sulfate of potash',
       'kmno4', 'potassium permanganate', 'potassium hydroxide', 'salt', 'dry ice', 'argon', 'nitrogen',
-      'inert gas', 'sulfonate', 'dithionite', 'bleach', 'chlorine', 'sodium sulfite', 'sodium sulphite', 'potassium sulfite', 'potassium sulphite', 'na2so3', 'k2so3', 'calcium sulfite', 'magnesium sulfite'],
+      'inert gas', 'sulfonate', 'dithionite', 'bleach', 'chlorine', 'sodium sulfite', 'sodium sulphite', 'potassium sulfite', 'potassium sulphite', 'na2so3', 'k2so3', 'calcium sulfite', 'magnesium sulfite', 'e220', 'e221', 'e222', 'e225', 'e226', 'e227', 'e211', 'e202', 'e300', 'e330', 'e334', 'e336', 'k2co3', 'caco3', 'nahco3', 'nacl', 'k2so4', 'k2s2o8', 'na2s2o3', 'h2so4', 'magnesium metabisulfite', 'magnesium metabisulphite', 'calcium metabisulfite', 'calcium metabisulphite', 'ammonium metabisulfite', 'metabisulfide', 'metabisulphide', 'potassium metabisulfide', 'potassium metabisulphide', 'potassium caseinate', 'caseinate', 'potassium bitartrate', 'bitartrate', 'potassium tartrate', 'potassium chloride', 'diatomaceous earth', 'perlite', 'dry yeast', 'cellulose', ],
   },
   danger: {
+    unwell: ['dizzy', 'lightheaded', 'light headed', 'vomiting', 'throwing up', 'nauseous', 'coughing', 'everyone is coughing', 'cannot stop coughing', 'burning throat', 'throat burns', 'throat is burning', 'passing out', 'feel faint', 'feels faint', 'fumes', 'it fumes', 'fuming', 'gassing'],
+    mixed: ['mixed', 'mixing', 'poured', 'spilled', 'splashed', 'tipped', 'knocked over'],
+    reactive: ['bleach', 'chlorine', 'hypochlorite', 'chlorine cleaner', 'acid', 'citric acid', 'phosphoric acid', 'cleaner', 'pbw'],
+    smell: ['smell', 'smells', 'stink', 'stinks', 'smelling', 'reeks', 'reek'],
+    place: ['cellar', 'room', 'building', 'hall', 'everywhere', "can't stay", 'cant stay', 'had to leave', "can't go in", 'cant go in', 'whole place', 'winery', 'barrel room', 'tank room'],
+    skin: ['on my hands', 'on my hand', 'on my skin', 'on his skin', 'on her skin', 'on his hands', 'on her hands', 'on my arm', 'on his arm', 'on my arms', 'on my leg', 'down my arm', 'on my face', 'all over me', 'on me'],
+    idiom: ['unconscious bias', 'passed out the', 'passed out new', 'drowning in', 'swallowed her pride', 'swallowed his pride', 'swallowed my pride', 'swallowed our pride', "can't breathe with", 'cant breathe with', 'collapsed laughing', 'collapsed into bed', 'collapsed on the couch', 'collapsed in bed', 'choking on the price', 'down in price', 'down in volume', 'down in the dumps', 'heart attack prices'],
     down: [
       'collapsed', 'has collapsed', 'collapsing', 'passed out', 'fainted', 'unconscious', 'knocked out',
       'blacked out', 'unresponsive', 'lying on the floor', 'on the floor not moving', 'not waking',
       "won't wake up", 'wont wake up', 'is out cold', 'out cold', 'keeled over', 'fell unconscious',
       'not moving', "isn't moving", 'isnt moving', 'not waking up', "doesn't move", 'doesnt move',
-      'overcome by fumes', 'convulsing', 'seizure', 'lost consciousness', 'no pulse', 'turned blue',
-    ],
+      'overcome by fumes', 'convulsing', 'seizure', 'lost consciousness', 'no pulse', 'turned blue', 'turning blue', 'going blue', 'blue lips', 'both are down', 'are down in', 'is down in', 'down in the tank', "someone's down", "somebody's down", 'someone is down', 'somebody is down', 'man is down', 'chest hurts', 'chest pain', 'went down in', 'hit the floor', 'heart attack', 'having a fit'],
     breathless: [
       "can't breathe", 'cant breathe', 'cannot breathe', 'can not breathe', 'cant breath', "can't breath",
       'not breathing', "isn't breathing", 'isnt breathing', 'stopped breathing', 'hard to breathe',
@@ -563,15 +570,13 @@ export const en: Words = {
     thing: [
       'foam', 'cap', 'hat', 'tank', 'tanks', 'barrel', 'barrels', 'rack', 'racks', 'pump', 'hose', 'shelf',
       'shelves', 'stack', 'roof', 'price', 'prices', 'market', 'bag', 'bags', 'box', 'boxes', 'pallet',
-      'pallets', 'krausen', 'ferment', 'fermentation', 'tent', 'trellis', 'bubble', 'wall', 'cork', 'head',
+      'pallets', 'krausen', 'ferment', 'fermentation', 'tent', 'trellis', 'bubble', 'wall', 'cork', 
       'bladder', 'ph', 'free', 'so2', 'yeast', 'crust', 'trench', 'row', 'filter', 'cake', 'hopper',
       'structure', 'wine', 'aroma', 'flavour', 'flavor', 'bed', 'airlock', 'app', 'phone', 'press', 'acidity',
-      'cart', 'stand', 'frame', 'ladder', 'chair', 'table', 'froth', 'mousse', 'liner', 'jacket', 'pomace',
-    ],
+      'cart', 'stand', 'frame', 'ladder', 'chair', 'table', 'froth', 'mousse', 'liner', 'jacket', 'pomace', 'bridge', 'scaffold', 'scaffolding', 'economy', 'deal', 'talks', 'shed', 'road', 'barn', 'tarp', 'canopy', 'wire', 'wires', 'post', 'posts', 'dam', 'bank', 'tunnel'],
     fell: ['fell in', 'fell into', 'fallen in', 'fallen into', 'slipped into', 'falls into', 'fell down'],
     beside: [
-      'next', 'by', 'near', 'in', 'into', 'at', 'beside', 'on', 'behind', 'from', 'under', 'inside', 'to',
-    ],
+      'next', 'by', 'near', 'in', 'into', 'at', 'beside', 'on', 'behind', 'from', 'under', 'inside', 'to', 'of', 'out'],
     silent: [
       "doesn't answer", 'doesnt answer', 'does not answer', "doesn't respond", 'doesnt respond',
       'does not respond', 'not answering', 'not responding', "isn't answering", 'isnt answering',
@@ -600,8 +605,7 @@ export const en: Words = {
       'eye is burning', 'eyes burn', 'burning eyes', 'burns my eyes', 'burning my eyes', 'burning in my eyes',
       'burnt my eyes', 'eye burning', 'in an eye', 'eyes are on fire', 'eyes sting', 'eyes stinging',
       'eyes are stinging', 'in your eyes', 'in your eye', 'eye splash', 'in eyes', 'in eye',
-      'splashed my eyes', 'splashed my eye', 'splashed his eyes', 'splashed her eyes',
-    ],
+      'splashed my eyes', 'splashed my eye', 'splashed his eyes', 'splashed her eyes', 'in my contact lens', 'in my contacts', 'in my lens', 'under my contact lens', 'in his contact lens', 'in her contact lens'],
     swallowed: ['swallowed', 'ingested', 'gulped', 'swallows'],
     drank: ['drank', 'has drunk', 'drunk', 'drank from', 'ate', 'sipped', 'eaten', 'swallow', 'drinks'],
     vessel: [
@@ -614,7 +618,7 @@ export const en: Words = {
       'bisulfite', 'bisulphite', 'sulfurous', 'cleaner', 'stock',
     ],
     gas: [
-      'gas', 'so2', 'sulfur dioxide', 'sulphur dioxide', 'cylinder', 'so2 bottle', 'gas bottle', 'fumes',
+      'gas', 'sulfur', 'sulphur', 'so2', 'sulfur dioxide', 'sulphur dioxide', 'cylinder', 'so2 bottle', 'gas bottle', 'fumes',
       'co2', 'the bottle of so2', 'so2 cylinder', 'regulator',
     ],
     leak: [
@@ -631,8 +635,7 @@ export const en: Words = {
       'sos', 'mayday', 'need a medic', 'need a doctor now', 'poisoned', 'been gassed', 'gassed',
       'call emergency', 'overcome by gas', 'overcome by so2', 'inhaled so2', 'inhaled gas', 'breathed in so2',
       'breathed in gas', 'inhaled', 'breathed in', 'man down', 'people down', 'electrocuted', 'drowning',
-      'drowned',
-    ],
+      'drowned', 'co2 alarm', 'gas alarm', 'so2 alarm', 'alarm going off', 'alarm is going off', 'alarm is going', 'gas detector going off', 'line burst', 'hose burst'],
     elsewhere: [
       'phone', 'email', 'emails', 'text', 'texts', 'call', 'calls', 'message', 'messages', 'whatsapp', 'mail',
       'supplier', 'lab', 'customer', 'client', 'exit', 'light', 'drill', 'lighting', 'contact', 'number',

@@ -6,6 +6,12 @@ export const es: Words = {
   groups: '.',
   says: {},
   danger: {
+    unwell: ['mareado', 'mareada', 'mareo', 'me mareo', 'vomitando', 'nauseas', 'tosiendo', 'no para de toser', 'humos', 'echa humo'],
+    mixed: ['mezclado', 'mezclada', 'mezcle', 'mezclamos', 'ha mezclado', 'derramado', 'se derramo'],
+    reactive: ['lejia', 'cloro', 'hipoclorito', 'acido'],
+    smell: ['olor', 'huele', 'huelen', 'apesta'],
+    place: ['bodega', 'sala', 'nave', 'por todas partes', 'no se puede estar', 'no se puede entrar'],
+    skin: ['en las manos', 'en la mano', 'en el brazo', 'en la piel', 'por encima'],
     down: [
       'se desmayo', 'se ha desmayado', 'desmayado', 'desmayada', 'se desplomo', 'se ha desplomado',
       'inconsciente', 'sin conocimiento', 'perdio el conocimiento', 'ha perdido el conocimiento',

@@ -6,6 +6,12 @@ export const fr: Words = {
   groups: '',
   says: {},
   danger: {
+    unwell: ['vertige', 'vertiges', 'tete qui tourne', 'nausee', 'nausees', 'vomit', 'vomir', 'tousse', "n'arrete pas de tousser", 'fumees'],
+    mixed: ['melange', 'melangee', 'a melange', 'renverse'],
+    reactive: ['javel', 'eau de javel', 'chlore', 'hypochlorite', 'acide'],
+    smell: ['odeur', 'sent', 'pue'],
+    place: ['chai', 'cave', 'cuverie', 'salle', 'partout', 'intenable', 'on ne peut pas rester'],
+    skin: ['sur les mains', 'sur la main', 'sur le bras', 'sur la peau'],
     down: [
       "s'est evanoui", "s'est evanouie", 'evanoui', 'evanouie', 'inconscient', 'inconsciente',
       "s'est effondre", "s'est effondree", 'a perdu connaissance', 'perdu connaissance', 'sans connaissance',

@@ -6,6 +6,12 @@ export const it: Words = {
   groups: '.',
   says: {},
   danger: {
+    unwell: ['vertigini', 'gira la testa', 'nausea', 'vomita', 'vomitando', 'tossisce', 'non smette di tossire', 'fumi'],
+    mixed: ['mescolato', 'mescolata', 'ho mescolato', 'rovesciato', 'versato'],
+    reactive: ['candeggina', 'cloro', 'ipoclorito', 'acido'],
+    smell: ['odore', 'puzza'],
+    place: ['cantina', 'stanza', 'sala', 'dappertutto', 'ovunque', 'non si puo stare'],
+    skin: ['sulle mani', 'sulla mano', 'sul braccio', 'sulla pelle'],
     down: [
       'e svenuto', 'e svenuta', 'svenuto', 'svenuta', 'incosciente', 'privo di sensi', 'priva di sensi',
       'ha perso i sensi', 'perso i sensi', 'ha perso conoscenza', 'perso conoscenza', 'e crollato',

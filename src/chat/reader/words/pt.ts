@@ -6,6 +6,12 @@ export const pt: Words = {
   groups: '.',
   says: {},
   danger: {
+    unwell: ['tonto', 'tonta', 'tonturas', 'tontura', 'nauseas', 'a vomitar', 'vomitando', 'a tossir', 'tossindo', 'fumos'],
+    mixed: ['misturei', 'misturou', 'misturado', 'misturada', 'derramado', 'entornou'],
+    reactive: ['lixivia', 'agua sanitaria', 'cloro', 'hipoclorito', 'acido'],
+    smell: ['cheiro', 'cheira', 'fede'],
+    place: ['adega', 'sala', 'por todo o lado', 'em todo o lado', 'nao se pode estar'],
+    skin: ['nas maos', 'na mao', 'no braco', 'na pele'],
     down: [
       'desmaiou', 'desmaiado', 'desmaiada', 'inconsciente', 'perdeu os sentidos', 'sem sentidos',
       'perdeu a consciencia', 'desfaleceu', 'caiu no chao', 'nao se mexe', 'nao acorda', 'esta no chao',

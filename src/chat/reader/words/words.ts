@@ -28,7 +28,7 @@ export type CueId =
   | 'fruit' | 'wine' | 'verb' | 'pronoun' | 'time-before' | 'month' | 'lot' | 'variety'
   | 'greeting' | 'thanks' | 'help' | 'cellar' | 'plain' | 'potassium' | 'sodium' | 'yet'
   | 'percent' | 'please' | 'in-store' | 'into' | 'clock-before' | 'no' | 'states' | 'plus' | 'times' | 'wick'
-  | 'in-water-name' | 'solution-name' | 'per-barrel' | 'rises-too' | 'tap-too'; // prettier-ignore
+  | 'should' | 'share-word' | 'clothes-size' | 'limit' | 'sample-word' | 'past-time' | 'put' | 'lately' | 'bag' | 'buy' | 'in-water-name' | 'solution-name' | 'per-barrel' | 'rises-too' | 'tap-too'; // prettier-ignore
 
 /** What a word is. */
 export type Tag =
@@ -48,7 +48,7 @@ export type Tag =
 
 /** The groups of words that together make an emergency; `emergency.ts` holds the rules. */
 export type DangerId =
-  | 'down' | 'breathless' | 'person' | 'thing' | 'silent' | 'went-in' | 'hurt-eye' | 'swallowed' | 'drank' | 'vessel' | 'fell' | 'beside'
+  | 'down' | 'breathless' | 'person' | 'thing' | 'silent' | 'went-in' | 'hurt-eye' | 'swallowed' | 'drank' | 'vessel' | 'fell' | 'beside' | 'unwell' | 'mixed' | 'reactive' | 'smell' | 'place' | 'skin' | 'idiom'
   | 'gas' | 'leak' | 'alarm' | 'elsewhere' | 'burnt' | 'chemical'; // prettier-ignore
 
 /**
