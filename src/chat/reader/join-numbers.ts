@@ -60,10 +60,14 @@ function joinFractions(terms: readonly Term[]): Term[] {
 }
 
 const CLAIMS_NEXT =
-  /^(label:(?!volume)|vessel:|cue:(target|to|add|raise|lot|molecular|from)$|stage:|unit:none)/;
+  /^(label:(?!volume)|vessel:|cue:(target|to|add|raise|lot|molecular|from|by|need|at)$|stage:|unit:none)/;
+
+/** Marks that claim the figure behind them: `-> 35 950 gal`, `+25 900 gal`, `@ 18 900 gal`. */
+const CLAIMING_MARKS = new Set(['->', '=>', '→', '+', '@', '<', '>', '≈']);
 
 /** Whether the number after term `i` is claimed by a label or vessel word before it. */
 function isClaimedBefore(terms: readonly Term[], i: number): boolean {
+  if (CLAIMING_MARKS.has(termIn(terms, i).text)) return true;
   let k = i;
   while (
     k >= 0 &&

@@ -2,8 +2,7 @@ import type { AdditiveId } from '../../../core/additives/additive-id.ts';
 import { readStrength } from '../../../core/additives/read-strength.ts';
 import type { Board } from '../board.ts';
 import { claim, figureAt, find, findingOf, hasTag, isCue, isFree, isMark, refuse, termAt } from '../board.ts';
-import type { UnitId } from '../words/words.ts';
-import { concentrationAt } from '../units.ts';
+import { concentrationAt, unitAt } from '../units.ts';
 
 const KNOWN: readonly AdditiveId[] = [
   'potassium-metabisulfite',
@@ -37,7 +36,7 @@ function strengthFrom(board: Board, i: number): StrengthAt | undefined {
 const JOINS = ['solution', 'powder', 'of', 'is', 'salt-word'] as const;
 const joins = (board: Board, i: number): boolean =>
   JOINS.some((cue) => isCue(board, i, cue)) ||
-  isMark(board, i, '-') ||
+  (isMark(board, i, '-') && !termAt(board, i).gap) ||
   isMark(board, i, '(') ||
   isMark(board, i, ':');
 
@@ -72,8 +71,11 @@ function cueNear(board: Board, from: number, to: number, cue: 'solution' | 'salt
   return near(from - 1) || near(to + 1) || (isMark(board, to + 1, '(') && near(to + 2));
 }
 
+/** `350 mL`: a figure before the unit, so that `ML done` is none. */
 const hasMillilitres = (board: Board): boolean =>
-  (['mL', 'cL', 'floz'] as const).some((unit: UnitId) => board.cues.has(`unit:${unit}`));
+  board.terms.some(
+    (_, i) => board.terms[i]?.kind === 'number' && unitAt(board, i + 1, ['mL', 'cL', 'floz']) !== undefined,
+  );
 
 function solutionOf(id: AdditiveId): AdditiveId {
   return id === 'potassium-metabisulfite'

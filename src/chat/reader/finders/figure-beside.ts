@@ -107,7 +107,10 @@ function fits(label: LabelId, { value }: Figure): boolean {
 
 /** The figure that a label names, before or after it: `18 free 60 total 3.5 pH` reads backwards, `pH 3.5 free 18` forwards. */
 export function figureBeside(board: Board, i: number, label: LabelId): Beside | undefined {
-  const [after, before] = [figureAfter(board, i), figureBefore(board, i)];
+  const after = figureAfter(board, i);
+  const behind = figureBefore(board, i);
+  const before = behind && suits(board, label, behind.at) ? behind : undefined;
+  if (after && before && !suits(board, label, after.at)) return before;
   if (!after || hasForeignUnit(board, after.at)) return before ?? after;
   if (!before || hasForeignUnit(board, before.at)) return after;
   const figure = (one: Beside): Figure =>
@@ -122,6 +125,18 @@ export function figureBeside(board: Board, i: number, label: LabelId): Beside | 
         ? after
         : before;
   return endsWithLabel(board, after.to + 1) ? before : after;
+}
+
+/** Whether the unit behind a figure may be this label's: degrees are of temperature, ppm of SO2, per cent of alcohol or sugar. */
+function suits(board: Board, label: LabelId, at: number): boolean {
+  const degrees = ['unit:C', 'unit:F', 'unit:degree'].some(
+    (tag) =>
+      hasTag(board, at + 1, tag as 'unit:C') ||
+      (isMark(board, at + 1, '°') && hasTag(board, at + 2, tag as 'unit:C')),
+  );
+  if (degrees) return label === 'temperature';
+  if (isMark(board, at + 1, '%')) return label === 'alcohol' || label === 'sugar' || label === 'aside';
+  return concentrationAt(board, at + 1) === undefined || !['ph', 'temperature', 'alcohol'].includes(label);
 }
 
 /** Whether an earlier label of this message already stood before its figure. */

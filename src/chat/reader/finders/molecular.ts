@@ -19,7 +19,9 @@ function findMolecularAt(board: Board, i: number): void {
     : (before ?? after);
   if (chosen === undefined) return;
   const aim = aimAt(board, chosen);
-  if (!aim) return;
+  // `mol so2 at 3.45 and 28 free?` asks for it at that pH.
+  const isPh = aim !== undefined && aim.mg_L >= 2.7 && aim.mg_L <= 4.5 && !Number.isInteger(aim.mg_L);
+  if (!aim || isPh) return;
   const [from, to] = [Math.min(i, chosen), Math.max(i, chosen === after ? aim.to : i)];
   if (states) refuse(board, 'ambiguous-number', from, to);
   else keepTarget(board, { ...aim, kind: 'molecular', to }, from);

@@ -46,6 +46,7 @@ function findVerb(board: Board, i: number): void {
   const found = governed(board, i);
   if (!found) return;
   const { aim, label } = found;
+  if (isCue(board, i, 'need') && label === 'ph') return;
   if (declines(board, i)) return refuse(board, 'ambiguous-number', i - 1, aim.to);
   if (hasTag(board, i - 1, 'label:ph')) return refuse(board, 'ambiguous-number', i - 1, aim.to);
   if (!isClear(board, i, found)) {

@@ -21,6 +21,7 @@ function hasOwnUnit(board: Board, i: number): boolean {
     unitAt(board, i + 1, MASS_UNITS) !== undefined ||
     concentrationAt(board, i + 1) !== undefined ||
     isMark(board, i + 1, '%') ||
+    isMark(board, i + 1, '°') ||
     (isCue(board, i + 1, 'thousand') && termAt(board, i + 1).gap === false) ||
     (isMark(board, i + 1, '/') && !termAt(board, i + 1).gap)
   );
@@ -132,7 +133,8 @@ function rangeEnd(board: Board, first: Named): { number: number; to: number } | 
   const second = worded(board, at) ?? (board.terms[at]?.kind === 'word' ? coded(board, at) : undefined);
   if (second?.number !== undefined && second.kind === first.kind)
     return { number: second.number, to: second.to };
-  const plural = termAt(board, first.from).text.endsWith('s') || isMark(board, k, '-');
+  const glued = isMark(board, k, '-') && !termAt(board, k).gap && !termAt(board, k + 1).gap;
+  const plural = termAt(board, first.from).text.endsWith('s') || glued;
   if (
     plural &&
     isWholeAt(board, at) &&

@@ -1,7 +1,7 @@
 import type { Board } from '../board.ts';
 import { isCellarTalk } from '../cellar-talk.ts';
 import { concentrationAt } from '../units.ts';
-import { find, isCue, isFree, isMark, refuse } from '../board.ts';
+import { find, isCue, isFree, isMark, refuse, hasTag, isLabelled } from '../board.ts';
 import { MOST_BARE_MOLECULAR_mg_L, aimAt, isArrow, keepTarget, kindAt, skipJoins } from './aim.ts';
 
 /** A step of less than this between two figures may be a range, not a way from one to the other. */
@@ -19,7 +19,8 @@ function findWayAt(board: Board, i: number): boolean {
   const labelAt =
     isMark(board, i - 1, ':') || isMark(board, i - 1, '=') || isCue(board, i - 1, 'is') ? i - 2 : i - 1;
   const before = kindAt(board, labelAt);
-  // `total 170 to 30 free`: the first figure is its label's own.
+  // `alc 13.5 -> 35`, `total 170 to 30 free`: the first figure is its label's own.
+  if (before === undefined && isLabelled(board, i) && !hasTag(board, labelAt, 'label:so2')) return false;
   if (before === 'total' && (second.kind === 'free' || second.kind === 'molecular')) return false;
   if (before === 'ph' || before === 'molecular') {
     refuse(board, 'ambiguous-number', i, second.to);

@@ -170,6 +170,8 @@ function setCountsAside(board: Board): void {
   for (let i = 0; i < board.terms.length; i++) {
     if (
       isFree(board, i) &&
+      isWhole(board, i) &&
+      termAt(board, i + 1).text.endsWith('s') &&
       termAt(board, i + 1).tags.some((tag) => tag === 'vessel:tank' || tag === 'vessel:other')
     )
       setAside(board, i, i + 1);
