@@ -4,7 +4,9 @@
 ## Pieces that other sentences use
 
 list-separator = {", "}
-cautions-separator = {"; "}
+cautions-separator = {" "}
+dose-in-all-separator = {" and "}
+cautions-of-separator = {" "}
 assumed-separator = {"; "}
 
 additive =
@@ -63,22 +65,47 @@ target =
 
 ## The first line: a dose
 
-dose-weigh = { weigh } { $amount } { additive }{ for-each }
-dose-measure = { measure } { $amount } { additive }{ for-each }
-dose-tablets = { take } { $amount } effervescent tablets ({ $size } g SO2 each){ for-each }
-dose-tablets-salt = { take } { $amount } tablets of { $size } g { additive }{ for-each }
-dose-gas = { weigh } { $amount } SO2 gas{ for-each }: trained people only, breathing apparatus at hand, by mass only
-dose-in-all =
+tablet-word =
     { $unit ->
-        [tablets] For all { $count }: { $amount } tablets.
-       *[other] For all { $count }: { $amount }.
+        [tablet] tablet
+       *[tablets] tablets
     }
+tablets-of =
+    { $additive ->
+        [tablet] { $amount } effervescent { tablet-word } ({ $size } g SO2 each)
+       *[other] { $amount } { tablet-word } of { $size } g { additive }
+    }
+measured =
+    { $unit ->
+        [tablet] { tablets-of }{ for-each }
+        [tablets] { tablets-of }{ for-each }
+        [solution] { $amount } of { $strength } % { additive }{ for-each }
+       *[other] { $amount } { additive }{ for-each }
+    }
+bare-amount =
+    { $unit ->
+        [tablet] { $amount } { tablet-word }{ for-each }
+        [tablets] { $amount } { tablet-word }{ for-each }
+       *[other] { $amount }{ for-each }
+    }
+dose-weigh = { weigh } { measured }
+dose-measure = { measure } { measured }
+dose-tablets = { take } { measured }
+dose-gas = { weigh } { $amount } SO2 gas{ for-each }: trained people only, breathing apparatus at hand, by mass only
+dose-in-all = For all { $count }: { $list }.
+in-all-stock = { $amount } of the { $strength } % solution
 dose-tablets-give = The tablets alone give { $gives } of { $wanted } { $unit }.
-dose-stock = Or { $amount } of a { $strength } % stock of it.
-dose-only-stock = { measure } { $amount } of a { $strength } % { additive }{ for-each }
-dose-rest-as-stock = The rest: { $amount } of a { $strength } % { additive }.
+dose-stock = Or { $amount } of a { $strength } % stock of it{ for-each }.
+dose-only-stock = { measure } { $amount } of { $strength } % { additive }{ for-each }
+dose-rest-as-stock = The rest: { $amount } of { $strength } % { additive }{ for-each }.
+dose-negligible = { at }nothing worth adding ({ $short } short).
+dose-too-fine = { at }too little to weigh or measure ({ $short } short): make a weaker stock.
+dose-gas-too-little = { at }{ $amount } is too little for gas: use a solution.
+dose-bottled = { at }bottled: an addition means opening every bottle. Ask first.
+refused-ammonium = { at }ammonium bisulfite is for grapes and must only (OIV): not for this wine; ask first.
+refused-ammonium-must = Is it must? Then write it whole, with the word must.
 dose-nothing = { at }nothing to add.
-dose-rate = { at }{ $dose } SO2 to add, that is { $amount } { additive } per { $per }
+dose-rate = { at }{ $dose } SO2 to add, that is { measured } per { $per }
 dose-rate-bare = { at }{ $dose } SO2 to add
 dose-need = { at }at pH { $ph }, { $molecular } molecular takes { $free } free
 dose-now = { at }{ $molecular } molecular now (pH { $ph }, { $free } free)
@@ -87,74 +114,89 @@ dose-now = { at }{ $molecular } molecular now (pH { $ph }, { $free } free)
 
 choice-head = { at }a choice, not a dose: at pH { $ph }, { $target } molecular takes { $free } free.
 choice-leave = { $mark } Leave it: { $free } free is { $molecular } molecular.
-choice-to = { $mark } To { $free } ({ $molecular } molecular): { $amount } { additive }
-choice-no-amount = { $mark } To { $free } ({ $molecular } molecular): no amount, the total would pass the limit on file.
+choice-to =
+    { $total ->
+        [unknown] { $mark } To { $free } ({ $molecular } molecular): { measured }; total unknown: measure it first
+       *[known] { $mark } To { $free } ({ $molecular } molecular): { measured }
+    }
+choice-no-amount = – To { $free } ({ $molecular } molecular): no amount: total would pass { $limit } (international code).
+choice-red =
+    { $kind ->
+        [none] If it is red, 0.6 takes { $free } free: nothing to add.
+        [over] If it is red, 0.6 takes { $free } free: no amount, total would pass { $limit } (international code).
+       *[other] If it is red, 0.6 takes { $free } free: { bare-amount }.
+    }
 ways-out = Or: colder, cleaner, checked more often; acid for a lower pH: ask someone qualified.
 
 ## The stage
 
-condition-stage = If malolactic is finished or not wanted.
+condition-stage = Only if malolactic is finished or not wanted.
 condition-red =
-    { $amount ->
+    { $kind ->
         [none] If it is red (0.6 molecular): nothing to add.
-        [over] If it is red (0.6 molecular): no amount, it would pass the limit.
-       *[other] If it is red (0.6 molecular): { $amount }{ red-unit }.
-    }
-condition-red-choice = If it is red, full is 0.6 molecular: More.
-round-red =
-    { $amount ->
-        [none] { at }if red (0.6 molecular), nothing to add.
-        [over] { at }if red (0.6 molecular), no amount: it would pass the limit.
-       *[other] { at }if red (0.6 molecular), { $amount }{ red-unit }.
-    }
-red-unit =
-    { $unit ->
-        [tablets] {" "}tablets{ for-each-red }
-       *[other] { for-each-red }
-    }
-for-each-red =
-    { $each ->
-        [several] {" "}for each
-       *[one] {""}
+        [over] If it is red (0.6 molecular): { bare-amount }, also over { $limit }.
+       *[other] If it is red (0.6 molecular): { bare-amount }.
     }
 no-dose-fermenting = { at }no sulfite now, it is still fermenting.
 no-dose-malolactic = { at }no sulfite now, malolactic is still to come.
 no-dose-molecular = Now { $molecular } molecular.
 no-dose-why = The bacteria need free below 5–10 and total below 30–40 mg/L (published for pH 3.3–3.5).
 no-dose-why-fermenting = Sulfite now is bound at once and harms yeast and bacteria: these need free below 5–10, total below 30–40 mg/L (published for pH 3.3–3.5).
-no-dose-all-the-same =
+no-dose-all-the-same = Your own figure all the same? Ask whoever answers for this wine, then write it whole: { whole-example }
+figure-alone = “{ $text }”: at that stage I take a figure only in a whole message. Write: { whole-example }
+whole-example = { $wine }{ in-all } { stage-word } add { $adds } { $unit }
+in-all =
+    { $count ->
+        [several] {" "}total
+       *[one] {""}
+    }
+stage-word =
     { $stage ->
-        [fermenting] Your own figure all the same? Ask whoever answers for this wine, then write it whole: T7 20 hl fermenting add 30 ppm
-       *[malolactic] Your own figure all the same? Ask whoever answers for this wine, then write it whole: T7 20 hl in ML add 30 ppm
+        [must] must
+        [fermenting] fermenting
+        [malolactic] in ML
+       *[base] base wine
     }
 
 ## What it does
 
-effect-land = { $after } { $unit } free if nothing binds; expect { $low }–{ $high }, as a third to a half usually binds; measure tomorrow.
-effect-land-molecular = From { $molecularNow } to { $molecular } molecular: { $after } { $unit } free if nothing binds; expect { $low }–{ $high }, as a third to a half usually binds; measure tomorrow.
-effect-land-to-molecular = To { $molecular } molecular: { $after } { $unit } free if nothing binds; expect { $low }–{ $high }, as a third to a half usually binds; measure tomorrow.
-effect-land-low = { $after } { $unit } free if nothing binds; below 10 free much or all may bind: expect { $low }–{ $high }, measure before you add again.
+effect-land = { $after } { $unit } free if nothing binds; expect { $range }, as a third to a half usually binds; measure tomorrow.
+effect-land-molecular = From { $molecularNow } to { $molecular } molecular: { $after } { $unit } free if nothing binds; expect { $range }, as a third to a half usually binds; measure tomorrow.
+effect-land-to-molecular = To { $molecular } molecular: { $after } { $unit } free if nothing binds; expect { $range }, as a third to a half usually binds; measure tomorrow.
+effect-land-low = { $after } { $unit } free if nothing binds; below 10 free much or all may bind: expect { $range }, measure before you add again.
+effect-land-small = { $after } { $unit } free at most: the rise is less than a reading’s error.
+effect-rise = Free rises about { $range } { $unit }, as a third to a half usually binds; measure tomorrow.
 effect-must = Most of it binds while the must ferments: it does not protect the wine later.
 effect-raise = + { $dose } { $unit } if nothing binds; a third to a half usually binds; measure tomorrow.
-effect-allowance = Dose × { $factor } for + { $percent } %: reaches { $after } { $unit } if at most { $covers } % binds; a third binding needs half as much again. Expect { $low }–{ $high }; measure tomorrow.
-effect-allowance-bare = Dose × { $factor } for + { $percent } %: covers { $covers } % binding; a third binding needs half as much again. Measure tomorrow.
-effect-share = Dose ÷ (1 − { $share }): reaches { $after } { $unit } if just that share binds; expect { $low }–{ $high }; measure tomorrow.
+third-needs =
+    { $third ->
+        [more] ; a third binding needs half as much again
+       *[covered] {""}
+    }
+effect-allowance = Dose × { $factor } for + { $percent } %: reaches { $after } { $unit } if at most { $covers } % binds{ third-needs }. Expect { $range }; measure tomorrow.
+effect-allowance-bare = Dose × { $factor } for + { $percent } %: covers { $covers } % binding{ third-needs }. Measure tomorrow.
+effect-share = Dose ÷ (1 − { $share }): reaches { $after } { $unit } if just that share binds; expect { $range }; measure tomorrow.
 effect-share-bare = Dose ÷ (1 − { $share }): right if just that share binds; measure tomorrow.
-other-as-share = If instead { $percent } % of it were lost (÷ { $divisor }): { $amount }.
-other-as-allowance = As an allowance of + { $percent } % (× { $factor }): { $amount }.
+other-as-share = If instead { $percent } % of it were lost (÷ { $divisor }): { bare-amount }.
+other-as-allowance = As an allowance of + { $percent } % (× { $factor }): { bare-amount }.
 nothing-why = { $free } free is { $molecular } molecular at pH { $ph }; the aim is { target }.
 nothing-why-free = { $free } free; the aim is { target }.
 
 ## An amount that is asked about, that went in, a stock
 
-adds = { at }{ $list } adds { $adds } SO2
-adds-rate = { at }{ $rate } { additive } adds { $adds } SO2
+adds =
+    { $number ->
+        [many] { at }{ $list } add { $adds } SO2
+       *[one] { at }{ $list } adds { $adds } SO2
+    }
+adds-rate = { at }“{ $rate }” ({ $ofAdditive } { additive }) adds { $adds } SO2
 amount = { $amount } { additive }
+amount-solution = { $amount } of { $strength } % { additive }
 amount-SO2 = { $amount } SO2 from { additive }
 amount-tablets =
     { $size ->
-        [none] { $amount } tablets of { additive }
-       *[other] { $amount } tablets of { $size } g { additive }
+        [none] { $amount } { tablet-word } of { additive }
+       *[other] { tablets-of }
     }
 adds-rate-mass = In { $volume } that is { $amount }.
 ferment-stop =
@@ -177,12 +219,14 @@ not-kept-reading = Not kept yet: I keep no readings so far, so write it in your 
 solution-weigh = Weigh { $amount } { additive } and fill up with water to { $volume }.
 solution-measure = Measure { $amount } { additive } and fill up with water to { $volume }.
 solution-no-recipe = For a solution to store or to clean with I have no recipe yet. A stock I can do: make 5 L of 10% kmbs
-solution-bought = Fill { $volume } with { additive } as it is sold.
+solution-from-powder = I make stocks from powder only: make { $volume } of 10% kmbs
 solution-strength = That stock holds { $strength } g SO2 in 100 mL.
 solution-fresh = Make it fresh and label it: it loses strength in days to weeks.
 
 ## What was read and what was assumed
 
+basis-oiv = By the OIV table for { $percent } %, { $celsius } °C (pK { $pK }).
+basis-oiv-need = By the OIV table for { $percent } %, { $celsius } °C (pK { $pK }); with pK 1.81 it would need { $free } free.
 read = Read: { $list }.
 assumed = Assumed: { $list }.
 set-aside = Not used: { $list }.
@@ -194,6 +238,9 @@ fact-total = total { $total }
 fact-temperature = { $celsius } °C
 fact-alcohol = { $percent } % vol
 fact-sugar = { $sugar } g/L sugar
+fact-figure = { $figure }
+fact-allowance = + { $percent } % allowance
+fact-share = { $percent } % binds
 fact-style = { $style ->
         [red] red
         [white] white
@@ -212,7 +259,14 @@ fact-product = { $product ->
 fact-organic = organic
 fact-stage = { stage-now }
 fact-target = aim { target }
-fact-strength = { additive }, { $strength } %
+fact-strength =
+    { $kind ->
+        [assay] { additive }, { $strength } % as purity
+        [SO2-yield] { additive }, { $strength } % taken as its SO2 yield
+        [salt-per-100mL] { additive }, { $strength } % = { $strength } g salt in 100 mL
+        [SO2-per-100mL] { additive }, { $strength } % = { $strength } g SO2 in 100 mL
+       *[noted] { additive }, { $strength } %
+    }
 assumed-additive = pure { additive }
 assumed-target = target { target }
 assumed-target-red = target { target } (red)
@@ -228,6 +282,8 @@ assumed-barrels =
     }
 note-free-unlabelled = “{ $text }” is free SO2
 note-ph-unlabelled = “{ $text }” is the pH
+note-round-ph = a bare decimal is the pH
+note-round-free = a bare figure is free SO2
 note-volume-sum = “{ $text }” added up
 note-strength-as-salt = the strength is grams of the salt in 100 mL; as SO2 it would be { $factor } times as strong
 note-strength-as-SO2 = the strength is grams of SO2 in 100 mL
@@ -256,8 +312,9 @@ ask-target =
     }
 ask-target-stage =
     { $stage ->
-        [must] { at }how many mg/L do you want to add to the must? Write it with the figures, like: T4 40 hl must add 40 ppm
-       *[base] { at }how many mg/L do you want to add to the base wine? Write it with the figures, like: T4 40 hl base wine add 20 ppm
+        [must] { at }how many { $unit } do you want to add to the must? Write it whole: { whole-example }
+        [base] { at }how many { $unit } do you want to add to the base wine? Write it whole: { whole-example }
+       *[other] { at }how many { $unit } do you want to add? Write it whole: { whole-example }
     }
 ask-tablet-additive = { at }which salt are the tablets? It stands on the packet.
 ask-additive = { at }which additive is it?
@@ -267,7 +324,6 @@ ask-tablet_SO2_g = { at }how many grams of SO2 does one effervescent tablet give
 ask-mass_g = { at }how many grams?
 ask-mass-spoon = { at }how many grams? A level teaspoon of powder is roughly 5 to 6 g, and that is too rough to dose by: use a balance.
 ask-fruit = { at }what volume in litres or gallons? I do not reckon by weight of fruit.
-ask-each-or-total = { at }is “{ $text }” each, or all together? Write it so: 2 x 40 hl, or the sum: 80 hl
 option = { $mark }) { $list }
 target-of =
     { $vessel ->
@@ -284,32 +340,69 @@ problem-volume-not-positive = { at }a volume of “{ $about }” cannot be. Send
 problem-unit-mismatch = { at }the unit does not fit in “{ $about }”. Free SO2 is in mg/L or ppm, volume in L, hl or gal.
 problem-ambiguous-number =
     { $kind ->
-        [percent] { at }“{ $about }” could be alcohol, or the strength of more than one thing. Write 13.5% vol, or: 10% kmbs solution
-        [degree] { at }“{ $about }” could be alcohol or temperature. Write 12% vol, or 12 C
-        [rate] { at }“{ $about }” could be more than one thing: free or total SO2, SO2 or powder. Write: free 18, add 30 ppm SO2, or 5 g per 10 L kmbs
-        [thousands] { at }“{ $about }” could be off by a thousand. Write it without that mark, like: 1200 L, or 1.2 L
-        [range] { at }“{ $about }” looks like a range. Send one figure, and say what it is.
+        [split] { at }a blank stands in “{ $about }”. Write: pH { $one }
+        [volume] { at }“{ $about }” could be off by a thousand. Write: { $one }, or: { $two }
+        [mass] { at }“{ $about }” could be off by a thousand. Write: { $one }, or: { $two }
+        [thousands] { at }“{ $about }” could be off by a thousand. Write: { $one }, or: { $two }
+        [powder] { at }“{ $about }”: of SO2, or of the powder? Write: add { $one } ppm SO2, or: { $two } g per 10 L { $named }
+        [salt] { at }“{ $about }”: of SO2, or of the salt? As SO2 it is too strong to be sold. If the label says salt, write: { salt-name } salt { $one }%
+        [water] { at }“{ $about }”: SO2 in water, or a stock of metabisulfite? Write: SO2 water { $one }%, or: { $one }% kmbs solution
+        [SO2-percent] { at }“{ $about }”: alcohol, SO2 in water or a stock of metabisulfite? Write: { $one }% vol, SO2 water { $one }%, or: { $one }% kmbs solution
+        [percent] { at }“{ $about }”: alcohol, or the strength of a solution? Write: { $one }% vol, or: { stock-name } solution { $one }%
+        [degree] { at }“{ $about }”: alcohol or temperature? Write: { $one }% vol, or: { $one } C
+        [to] { at }“{ $about }”: is { $two } the aim? Write: free { $one }, target { $two }
+        [range] { at }“{ $about }” looks like a range. Write one of them: free { $one }, or: free { $two }
+        [pair] { at }“{ $about }”: free and total, or one reading between two marks? Write: free { $one } total { $two }, or: free { $one }
+        [free] { at }“{ $about }”: free or total SO2? Write: free { $one }, or: total { $one }
+        [aim] { at }“{ $about }”: to add, or to reach? Write: add { $one } ppm, or: target { $one }
        *[other] { at }“{ $about }” can be read in more than one way. Say what it is, like: pH 3.58 free 21 1450 gal
+    }
+salt-name =
+    { $named ->
+        [ammonium-bisulfite-solution] ammonium bisulfite
+       *[other] potassium bisulfite
+    }
+stock-name =
+    { $named ->
+        [sodium-metabisulfite] smbs
+        [sodium-metabisulfite-solution] smbs
+       *[other] kmbs
     }
 problem-each-or-total = { at }is “{ $about }” of each, or of all together? Write: { $about } each, or: { $about } total
 problem-conflicting-values = { at }two values for one thing: “{ $about }”. Send one of them; two wines go on a line each.
 problem-unknown-additive = { at }“{ $about }” is no SO2 additive that I know. I know: potassium or sodium metabisulfite (powder, solution), bisulfite, SO2 in water, SO2 gas, tablets.
-problem-did-you-mean = { at }“{ $about }” is another chemical. Did you mean metabisulfite? Then send it again with that word.
+problem-did-you-mean = { at }“{ $about }” is another chemical. Did you mean metabisulfite? Then write metabisulfite.
 problem-strength-out-of-range = { at }the strength “{ $about }” does not fit that additive. Look at the label and send it like: 10% kmbs
 problem-value-out-of-range = { at }“{ $about }” is more than any cellar has. Check the figure and its unit.
 problem-not-understood = I could not read that. Send a reading like: T4 1450 gal pH 3.58 free 21. ? shows more.
 problem-too-long = That is too long to read safely. Send at most 25 vessels at a time, a line each.
-problem-no-number = No dose until that is clear.
-bare-number = “{ $text }” of what? Write it whole, with the stage, like: T7 20 hl must add { $text } ppm
+problem-no-number =
+    { $again ->
+        [correction] No dose until that is clear.
+       *[whole] No dose until that is clear. Send the whole line again.
+    }
+problem-share = { at }“{ $about }”: I reckon with at most 4/5 (0.8) that binds.
+problem-vessel-twice = { $vessel } stands twice: send it once.
+problem-two-vessels = “{ $about }”: two vessels. Send a line for each.
+no-such-button = There is no { $text } here: 1 to { $last }, or a whole reading.
 
 ## Warnings
 
 warning-no-dose-at-this-stage = ⚠ { stage-now }: no dose belongs to that stage; ask whoever answers for this wine.
-warning-additive-not-permitted = ⚠ That additive is not permitted there.
+warning-stage-not-over =
+    { $stage ->
+        [malolactic] ⚠ This will stop or delay malolactic: ask whoever answers for this wine first. { no-dose-why }
+       *[fermenting] ⚠ Fermenting wine binds it at once, and it does not stop yeast reliably: ask whoever answers for this wine first.
+    }
+warning-additive-not-permitted =
+    { $additive ->
+        [ammonium-bisulfite-solution] ⚠ Ammonium bisulfite is for grapes and must only (OIV): not for this wine; ask first.
+       *[sodium] ⚠ Sodium metabisulfite is not allowed in wine everywhere (not under OIV; EU and UK likewise, from memory): ask first.
+    }
 warning-total-over-limit =
     { $total ->
-        [known] ⚠ Total would be { $total_after_mg_L } { $unit }, over the { $limit_mg_L } of the international code; your country’s law decides: ask before you add.
-       *[at-least] ⚠ Total would be at least { $total_after_mg_L } { $unit }, over the { $limit_mg_L } of the international code; your country’s law decides: ask before you add.
+        [known] ⚠ That would make total { $total_after_mg_L }, over { $limit_mg_L } { $unit } (international code); your country’s law decides: ask first.
+       *[at-least] ⚠ That would make total at least { $total_after_mg_L }, over { $limit_mg_L } { $unit } (international code); your country’s law decides: ask first.
     }
 warning-total-near-limit =
     { $total ->
@@ -318,7 +411,7 @@ warning-total-near-limit =
     }
 warning-total-unknown = ⚠ The total is unknown: measure it.
 warning-total-unknown-half = ⚠ The total is unknown: measure it, free alone comes over half of the { $limit_mg_L } { $unit } limit.
-warning-no-limit-on-file = ⚠ No limit on file for this wine: look up your country’s law.
+warning-no-limit-on-file = ⚠ I know no limit for such wine: look up your country’s law.
 warning-limit-unconfirmed = ⚠ The limit is unconfirmed: look up your country’s law.
 warning-addition-large = ⚠ { $dose_mg_L } { $unit } at once is a lot: check the volume and its unit.
 warning-free-needed-high = ⚠ { $target_free_mg_L } { $unit } free is a lot: keep it colder, cleaner, checked more often; or a lower pH, with advice.
@@ -326,24 +419,29 @@ warning-molecular-above-2 = ⚠ Above 2 { $unit } molecular SO2 is smelt and tas
 warning-free-low-may-bind-all = ⚠ Below 10 free much or all may bind: measure before adding again.
 warning-ph-unusual = ⚠ pH { $ph } is unusual for wine: check the meter.
 warning-basis-fallback = ⚠ The OIV basis needs alcohol, and 20–40 °C: reckoned with pK 1.81.
-warning-basis-fallback-change = ⚠ The OIV basis needs alcohol, and 20–40 °C: reckoned with pK 1.81; it changes the need by about { $need_change_mg_L } { $unit }.
+warning-basis-fallback-change = ⚠ The OIV basis needs alcohol, and 20–40 °C: reckoned with pK 1.81. By OIV at { $compared_at_alcohol_percent } %, { $compared_at_temperature_C } °C it would be about { $change } { $unit } { $direction ->
+    [more] more.
+   *[less] less.
+}
 warning-rounding-coarse = ⚠ What a scale shows is off by { $rounding_mg_L } { $unit } here: use a finer one, or a stock.
 warning-already-dosed = ⚠ It was dosed lately.
 
 ## Cautions
 
-cautions = ⚠ { $list }.
-caution-trained-people-with-breathing-apparatus = trained people only, breathing apparatus at hand
-caution-grapes-and-must-only = ammonium bisulfite is for grapes and must only
-caution-ventilate = ventilate
-caution-never-lean-in = never lean into a tank
-caution-gloves-goggles = gloves, goggles
-caution-no-acid-no-chlorine = never with acid or chlorine cleaners
-caution-asthma = not for anyone with asthma
-caution-dissolve-first = dissolve in a little wine or water first
-caution-foams-with-carbon-dioxide = wine full of CO2 foams over
-caution-mix-and-measure-again = mix, measure again after a day
-caution-label-and-rules-first = the label, your local rules and a qualified person come first
+cautions = ⚠ { $list }
+caution-trained-people-with-breathing-apparatus = Trained people only, breathing apparatus at hand.
+caution-grapes-and-must-only = For grapes and must only.
+caution-ventilate = Ventilate.
+caution-never-lean-in = Never lean into a tank.
+caution-gloves-goggles = Gloves, goggles.
+caution-no-acid-no-chlorine = Never with acid or chlorine cleaners.
+caution-asthma = Not for asthmatics.
+caution-crush-first = Crush, then dissolve in a little wine or water.
+caution-dissolve-first = Dissolve in a little wine or water first.
+caution-foams-with-carbon-dioxide = Wine full of CO2 foams over.
+caution-mix-and-measure-again = Mix, measure after a day.
+caution-label-and-rules-first = Label, local rules and a qualified person come first.
+cautions-of = ⚠ { additive }: { $list }
 cautions-short = ⚠ Cautions as before: button Safety.
 
 ## Chat
@@ -351,6 +449,7 @@ cautions-short = ⚠ Cautions as before: button Safety.
 chat-greeting = Hello. Send me a reading, like: T4 1450 gal pH 3.58 free 21. ? shows more.
 chat-thanks = You are welcome. Measure again tomorrow.
 chat-other = I reckon SO2 additions. Send a reading, like: T4 1450 gal pH 3.58 free 21. ? shows more.
+still-asked = One thing is still missing.
 chat-negated = Nothing added, then. Nothing to keep.
 chat-help-what = Send a reading, get the SO2 addition.
 chat-help-dose = T4 1450 gal pH 3.58 free 21
@@ -379,6 +478,7 @@ old-button = That button is from an older message. Please send the reading again
 emergency-out = EVERYBODY OUT to fresh air, now.
 emergency-nobody-in = Nobody goes in or leans in after anyone.
 emergency-call = Call the emergency services.
+emergency-swallowed = Swallowed: rinse the mouth, do not make them vomit, call poison control or the emergency services.
 emergency-eyes = Eyes: rinse with water for 15 minutes, contact lenses out.
 
 ## The working
@@ -426,7 +526,7 @@ more-head =
     }
 more-no-warnings = No further warnings.
 choice-left = { at }left as it is, { $molecular } molecular. Taste and measure often.
-choice-over = { at }no amount for that: its total would pass the limit on file.
+choice-over = { at }no amount for that: total would pass { $limit } (international code).
 round-choice = { at }pH { $ph } makes it a choice: send it alone.
 round-missing =
     { $field ->
@@ -442,6 +542,53 @@ round-missing =
         [mass_g] { at }how many grams?
        *[none] { at }something is missing.
     }
+round-dose = { $vessel } ({ $list }): { round-amount }
+round-dose-bare = { at }{ round-amount }
+round-amount =
+    { $unit ->
+        [tablets] { $amount } tablets{ round-of }{ round-all }{ round-if-red }
+       *[other] { $amount }{ round-of }{ round-all }{ round-if-red }
+    }
+round-of =
+    { $additive ->
+        [none] {""}
+       *[other] {" "}{ additive }
+    }
+round-all =
+    { $all ->
+        [none] {""}
+       *[other] {" "}each, { $all } in all
+    }
+round-if-red =
+    { $red ->
+        [unsaid] {""}
+        [none] , if red nothing
+        [over] , if red { $redAmount }, also over the limit
+       *[some] , if red { $redAmount }
+    }
+round-nothing = { $vessel } ({ $list }): nothing to add
+round-nothing-bare = { at }nothing to add
+round-head =
+    { $kind ->
+        [powder] Weigh { additive }{ round-strength }:
+        [gas] Weigh SO2 gas, by mass only; trained people only, breathing apparatus at hand:
+        [tablet] Take effervescent tablets of { $size } g SO2:
+        [salt-tablet] Take tablets of { $size } g { additive }:
+       *[solution] Measure { additive }{ round-strength }:
+    }
+round-strength =
+    { $size ->
+        [none] {""}
+       *[other] , { $size } %
+    }
+round-for-all = For all: { $list }.
+round-red = “If red” is for 0.6 molecular.
+round-stock = As a { $strength } % stock of it: { $list }.
+round-rest = The rest as a { $strength } % stock: { $list }.
+round-stock-of = { $vessel } { $amount }
+round-low = ⚠ Below 10 free much or all may bind: { $list }. There measure before adding again.
+round-name = { $name }
+round-again = Send each line that could not be read again, whole.
 round-target-stage = { at }how many mg/L do you want to add?
 round-not-understood = “{ $about }” I could not read.
 round-effect = A third to a half of an addition usually binds: measure tomorrow. For a vessel’s working send its line alone.
@@ -455,6 +602,10 @@ choice-additive = { $value ->
         [sulfur-dioxide-solution] SO2 solution in water
         [sulfur-dioxide-gas] SO2 gas
        *[tablet] Effervescent tablets
+    }
+choice-powder = { $value ->
+        [potassium-metabisulfite] Potassium metabisulfite powder
+       *[sodium-metabisulfite] Sodium metabisulfite powder
     }
 choice-tablet_salt_g = { $value } g
 choice-tablet_SO2_g = { $value } g

@@ -7,12 +7,31 @@ import { answerEmergency } from './intents/emergency.ts';
 import { answerProblem } from './intents/problem.ts';
 import { answerReading as answerKeptReading } from './intents/reading.ts';
 import { answerSolution } from './intents/solution.ts';
+import { line } from './lines/line.ts';
 import type { Outcome, Turn } from './outcome.ts';
 
-/** What to say to one reading: an emergency before a problem, a problem before every figure. */
+/**
+ * What to say to one reading: an emergency before a problem, a problem before every figure. Never nothing: where no
+ * answer, question, problem or talk comes of it, it is asked for anew.
+ */
 export function answerReading(reading: Reading, language: Language, turn: Turn): Outcome {
-  if (reading.intent === 'emergency') return answerEmergency(language);
-  if (reading.problems.length > 0) return answerProblem(reading);
+  const outcome = answerByIntent(reading, language, turn);
+  if (saysSomething(outcome)) return outcome;
+  const lines = [line('first', 'problem-not-understood'), ...outcome.lines];
+  return { answer: null, inRound: lines.slice(0, 1), lines, buttons: [] };
+}
+
+/** Lines about what was read or assumed alone tell nobody anything. */
+function saysSomething({ lines, inRound }: Outcome): boolean {
+  return (
+    inRound.length > 0 &&
+    lines.some(({ room }) => room === 'first' || room === 'question' || room === 'effect')
+  );
+}
+
+function answerByIntent(reading: Reading, language: Language, turn: Turn): Outcome {
+  if (reading.intent === 'emergency') return answerEmergency(language, reading.topic);
+  if (reading.problems.length > 0) return answerProblem(reading, turn);
   switch (reading.intent) {
     case 'dose':
       return answerDose(reading, turn);

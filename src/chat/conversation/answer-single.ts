@@ -1,47 +1,77 @@
 import type { Reading, Understood } from '../reader/understood.ts';
-import type { DecimalMark } from '../replies/number-text.ts';
 import type { Reply } from '../replies/reply.ts';
 import { answerReading } from './answer-reading.ts';
 import { belongs } from './complete.ts';
 import { questionFor } from './intents/asking.ts';
-import { mannerOf } from './manner.ts';
+import { line } from './lines/line.ts';
+import { problemLines } from './lines/problems.ts';
+import { vesselText } from './lines/vessel.ts';
+import { mannerOf, type Manner } from './manner.ts';
 import type { Memory, Waiting } from './memory.ts';
 import { cautionedToday, keeping, nextMemory, waitFor } from './next-memory.ts';
 import type { Outcome } from './outcome.ts';
 import type { Handled, IncomingMessage } from './ports.ts';
 import type { Settings } from './settings.ts';
+import { vesselsProblem } from './vessels-in-problem.ts';
 import { stillWaiting } from './waiting.ts';
 import { withShared } from './with-shared.ts';
 
-/** One reading: its answer, the reply, and what is kept for the next message. */
+/**
+ * One reading: its answer, the reply, and what is kept for the next message.
+ *
+ * @param completes whether the reading is the one that waited, with its answer
+ */
 export function answerSingle(
   message: IncomingMessage,
   understood: Understood,
   memory: Memory,
   settings: Settings,
+  completes = false,
 ): Handled {
   const [first] = understood.readings;
   if (!first) return { writes: [], replies: [], understood, answers: [] };
   const reading = withShared(first, understood.shared);
+  const manner = mannerOf(reading, understood.decimalMark, settings);
   const outcome = answerReading(reading, understood.language, {
     settings,
-    manner: mannerOf(reading, understood.decimalMark, settings),
+    manner,
     number: memory.nextNumber,
     cautioned: cautionedToday(memory, message.at),
   });
-  const kept = keepsWaiting(reading, stillWaiting(memory, message.at));
-  const asked =
-    kept && reading.problems.length > 0 ? askAgain(kept, outcome, understood.decimalMark, settings) : outcome;
-  const waiting =
-    outcome.waits === undefined
-      ? kept
-      : waitFor(outcome.waits, { number: memory.nextNumber, reading, at: message.at }, settings);
-  const reply: Reply = { language: settings.language, lines: asked.lines, buttons: asked.buttons };
+  const before = stillWaiting(memory, message.at);
+  const kept = completes && outcome.doubt ? undefined : keepsWaiting(reading, before);
+  const asked = kept ? askAgain(kept, reading, outcome, manner, settings) : outcome;
+  const waiting = kept ?? waitingFor(outcome, reading, memory.nextNumber, message.at, settings);
+  const muddle = vesselsProblem(textOf(message), reading, settings);
+  const lines = muddle
+    ? [muddle, line('question', 'problem-no-number', { again: 'correction' })]
+    : asked.lines;
+  const reply: Reply = { language: settings.language, lines, buttons: asked.buttons };
   const next = nextMemory(memory, message.at, understood, [{ reading, outcome }], {
     buttons: reply.buttons,
     waiting,
   });
   return { writes: keeping(message, next), replies: [reply], understood, answers: [outcome.answer] };
+}
+
+function textOf({ content }: IncomingMessage): string {
+  return content.kind === 'text' ? content.text : '';
+}
+
+/** What the reply waits for from now on: the field that it asks, or the figure that is in doubt. */
+function waitingFor(
+  { waits, doubt }: Outcome,
+  reading: Reading,
+  number: number,
+  at: number,
+  settings: Settings,
+): Waiting | undefined {
+  if (doubt !== undefined) {
+    const { field, reading: kept, problems, settledBy, byBareNumber } = doubt;
+    const waiting = waitFor(field, { number, reading: kept, at }, settings);
+    return { ...waiting, doubt: { problems, settledBy, byBareNumber } };
+  }
+  return waits === undefined ? undefined : waitFor(waits, { number, reading, at }, settings);
 }
 
 /** Talk in between leaves a question waiting, and so does a slip in the answer to it. */
@@ -50,12 +80,24 @@ function keepsWaiting(reading: Reading, waiting: Waiting | undefined): Waiting |
   return reading.problems.length > 0 && belongs(waiting.reading, reading) ? waiting : undefined;
 }
 
+/** The question once more after a slip in its answer, and after a nod that answers nothing; not after other talk. */
 function askAgain(
   waiting: Waiting,
+  reading: Reading,
   outcome: Outcome,
-  mark: DecimalMark,
+  manner: Manner,
   settings: Settings,
 ): Pick<Outcome, 'lines' | 'buttons'> {
-  const { question, buttons } = questionFor(waiting.field, waiting, 'question', mark, settings);
-  return { lines: [...outcome.lines, ...question], buttons };
+  const nods = reading.intent === 'chat' && reading.topic === 'thanks';
+  if (!nods && reading.problems.length === 0) return outcome;
+  const said = nods ? [line('first', 'still-asked')] : outcome.lines;
+  if (waiting.doubt !== undefined) {
+    const doubtful: Reading = { ...waiting.reading, problems: waiting.doubt.problems };
+    const doubt = problemLines(doubtful, vesselText(waiting.reading), manner.mark, 'correction');
+    const isTheSame = JSON.stringify(reading.problems) === JSON.stringify(waiting.doubt.problems);
+    const slip = said.filter(({ key }) => key !== 'problem-no-number');
+    return { lines: [...(isTheSame ? [] : slip), ...doubt], buttons: [] };
+  }
+  const { question, buttons } = questionFor(waiting.field, waiting, 'question', manner, settings);
+  return { lines: [...said, ...question], buttons };
 }

@@ -1,10 +1,10 @@
+import { ADDITIVES } from '../../core/additives/additives.ts';
 import type { DoseChoice } from '../../core/dose/answer.ts';
 import type { AskedField, Fields } from '../reader/understood.ts';
 import { numberText, type DecimalMark } from '../replies/number-text.ts';
 import type { Button, Line } from '../replies/reply.ts';
 import type { SentenceKey } from '../replies/sentence-keys.ts';
 import { perLitre, type Manner } from './manner.ts';
-import { shownChoices } from './shown-choices.ts';
 import { letterAt } from './waiting.ts';
 
 /** What a button does; its key is `does:number`, of a choice `does:number:which`. */
@@ -55,14 +55,24 @@ export function doseButtons(number: number, applies: Applies): Button[] {
   return buttonsFor(number, [...all.slice(0, MOST_BUTTONS - 1), 'm']);
 }
 
-/** A button for each way out of a choice, then all the rest. */
-export function choiceButtons(number: number, choices: readonly DoseChoice[], manner: Manner): Button[] {
-  const ways = shownChoices(choices).map(({ choice, place }, at): Button => {
-    const values: Line['values'] = { free: perLitre(choice.free_mg_L, manner) };
-    const label = choice.target === undefined ? 'button-choice-leave' : 'button-choice-to';
-    return { key: `c:${number}:${place}`, mark: String(at + 1), label, values };
+/** A button for each way out of a choice that may be taken, the other colour, then all the rest. */
+export function choiceButtons(
+  number: number,
+  choices: readonly DoseChoice[],
+  mayBeRed: boolean,
+  manner: Manner,
+): Button[] {
+  const ways = choices.flatMap((choice, place) => {
+    if (choice.over_limit) return [];
+    const label = choice.target === undefined ? ('button-choice-leave' as const) : ('button-choice-to' as const);
+    return [{ key: `c:${number}:${place}`, label, values: { free: perLitre(choice.free_mg_L, manner) } }];
   });
-  return [...ways, { key: `m:${number}`, mark: String(ways.length + 1), label: LABELS.m, values: {} }];
+  const others = [...(mayBeRed ? (['red'] as const) : []), 'm' as const].map((does) => ({
+    key: `${does}:${number}`,
+    label: LABELS[does],
+    values: {},
+  }));
+  return [...ways, ...others].map((button, at) => ({ ...button, mark: String(at + 1) }));
 }
 
 /** A button for each value of the field that is asked, marked with its letter. */
@@ -75,9 +85,16 @@ export function letterButtons(
   return choices.map((fields, at) => ({
     key: `l:${number}:${letterAt(at)}`,
     mark: letterAt(at),
-    label: `choice-${field}`,
+    label: labelOf(field, fields, choices),
     values: { value: choiceText(fields, mark) },
   }));
+}
+
+/** Among solutions a powder is named as one; the salts of a tablet are none. */
+function labelOf(field: AskedField, { additive }: Fields, choices: readonly Fields[]): string {
+  const amongSolutions = choices.some((one) => one.additive?.endsWith('-solution'));
+  const isPowder = additive !== undefined && ADDITIVES[additive].kind === 'powder';
+  return amongSolutions && isPowder ? 'choice-powder' : `choice-${field}`;
 }
 
 function choiceText({ additive, tablet_salt_g, tablet_SO2_g }: Fields, mark: DecimalMark): string {

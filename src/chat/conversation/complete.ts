@@ -1,5 +1,6 @@
 import { finishReading } from '../reader/finish-reading.ts';
-import type { Fields, Intent, Reading } from '../reader/understood.ts';
+import type { Fields, FieldName, Intent, Reading } from '../reader/understood.ts';
+import type { Waiting } from './memory.ts';
 import type { Settings } from './settings.ts';
 
 /** Whether two values of one field say the same. */
@@ -61,4 +62,43 @@ export function complete(waiting: Reading, next: Partial<Reading>, settings: Set
     },
     settings,
   );
+}
+
+/** While a target is asked, a level of free SO2 alone is the target and no measured figure (`30 free`). */
+export function asAnswered(waiting: Waiting, next: Reading): Reading {
+  const { free_mg_L, ...others } = next.fields;
+  if (waiting.field !== 'target' || waiting.doubt !== undefined) return next;
+  if (next.intent !== 'dose' || free_mg_L === undefined || Object.keys(others).length > 0) return next;
+  const notes = next.notes.filter(({ id }) => id !== 'free-unlabelled');
+  return { ...next, fields: { target: { free_mg_L } }, where: {}, notes };
+}
+
+/** Whether a message says what was in doubt: one of its fields, and of a volume of several whether it is of each. */
+function settles({ doubt, reading }: Waiting, next: Reading): boolean {
+  if (doubt === undefined) return true;
+  if (!doubt.settledBy.some((name: FieldName) => next.fields[name] !== undefined)) return false;
+  const { statedEach, statedTotal } = next.marks;
+  const whole =
+    statedEach || statedTotal || next.containers !== undefined || next.fields.vessels !== undefined;
+  return !reading.marks.eachOrTotal || whole === true;
+}
+
+/** The volume of all vessels, where the answer says it is of each. */
+function ofAllVessels(reading: Reading, next: Reading): Reading {
+  const { volume_L, vessels } = next.fields;
+  const count = reading.fields.vessels?.length;
+  if (volume_L === undefined || vessels !== undefined || count === undefined || !next.marks.statedEach)
+    return next;
+  return { ...next, fields: { ...next.fields, volume_L: volume_L * count } };
+}
+
+/** The reading that waits with its answer; while the answer leaves in doubt what was, the problem stands. */
+export function completeWaiting(waiting: Waiting, next: Reading, settings: Settings): Reading {
+  const { doubt, reading } = waiting;
+  if (doubt === undefined) return complete(reading, next, settings);
+  if (!settles(waiting, next))
+    return { ...complete(reading, next, settings), problems: doubt.problems, asks: [] };
+  const { eachOrTotal: _asked, ...marks } = reading.marks;
+  const notes = reading.notes.filter(({ id }) => id !== 'each-or-total');
+  return complete({ ...reading, marks, notes }, ofAllVessels(reading, next), settings);
 }

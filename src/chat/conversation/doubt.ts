@@ -27,13 +27,18 @@ export function doubtOf(reading: Reading): InDoubt | undefined {
   if (reading.intent === 'chat' || reading.intent === 'emergency') return undefined;
   const asked = askedFor(reading);
   if (asked === undefined) return undefined;
-  const dropped: readonly FieldName[] = [asked.field, ...asked.settledBy];
+  const dropped: readonly FieldName[] = asked.settledBy.includes('additive')
+    ? [asked.field, 'additive']
+    : [asked.field];
   const fields = Object.fromEntries(
     Object.entries(reading.fields).filter(([name]) => !dropped.includes(name as FieldName)),
   );
   // A mass that is in doubt was meant as the amount: with it the message asks what it does.
   const intent = asked.field === 'mass_g' && reading.intent === 'dose' ? 'effect' : reading.intent;
-  const kept: Reading = { ...reading, intent, fields, problems: [], asks: [asked.field] };
+  const marks = dropped.includes('additive')
+    ? { ...reading.marks, unnamedAdditive: true as const }
+    : reading.marks;
+  const kept: Reading = { ...reading, intent, fields, marks, problems: [], asks: [asked.field] };
   return { ...asked, problems: reading.problems, reading: kept };
 }
 
@@ -77,6 +82,7 @@ function ofAmbiguous(reading: Reading, about: string): Asked | undefined {
     case 'free':
     case 'aim':
     case 'pair':
+      if (fields.free_mg_L !== undefined) return undefined;
       return { field: 'free_mg_L', settledBy: ['free_mg_L', 'total_mg_L', 'target'], byBareNumber: false };
     case 'to':
     case 'range':
@@ -84,10 +90,12 @@ function ofAmbiguous(reading: Reading, about: string): Asked | undefined {
         ? { field: 'free_mg_L', settledBy: ['free_mg_L'], byBareNumber: false }
         : undefined;
     case 'powder':
+      if (fields.target !== undefined) return undefined;
       return { field: 'target', settledBy: ['target', 'rate_mg_L'], byBareNumber: false };
     case 'salt':
-    case 'water':
       return { field: 'strength_percent', settledBy: ['strength_percent'], byBareNumber: false };
+    case 'water':
+      return { field: 'strength_percent', settledBy: ['strength_percent', 'additive'], byBareNumber: false };
     default:
       return undefined;
   }

@@ -37,6 +37,12 @@ export function waitFor(field: AskedField, { number, reading, at }: Remembered, 
   return { field, reading, number, askedAt: at, letters: lettersOf(choicesFor(field, reading, settings)) };
 }
 
+function concentrationOf(said: readonly Said[], memory: Memory): Pick<Memory, 'concentrationUnit'> {
+  const unit =
+    said.flatMap(({ reading }) => reading.concentrationUnit ?? []).at(-1) ?? memory.concentrationUnit;
+  return unit === undefined ? {} : { concentrationUnit: unit };
+}
+
 /** Only what has a number of its own can be meant by a later button. */
 function isRemembered({ reading }: Said): boolean {
   return reading.problems.length === 0 && reading.intent !== 'chat' && reading.intent !== 'emergency';
@@ -60,6 +66,7 @@ export function nextMemory(
     .map(({ one, number }) => ({ number, reading: one.reading, at }));
   const today = dayOf(at);
   const cautioned = said.flatMap(({ outcome }) => outcome.cautioned ?? []);
+  const askedTarget = said.find(({ outcome }) => outcome.askedTarget);
   const stillToday = Object.entries(memory.cautionedOn).filter(([, day]) => day === today);
   return {
     remembered: [...memory.remembered, ...remembered].slice(-REMEMBERED),
@@ -68,6 +75,7 @@ export function nextMemory(
     cautionedOn: Object.fromEntries([...stillToday, ...cautioned.map((id) => [id, today] as const)]),
     decimalMark: understood.decimalMark,
     ...(waiting && { waiting }),
-    ...(said.some(({ outcome }) => outcome.askedTarget) && { askedTargetAt: at }),
+    ...concentrationOf(said, memory),
+    ...(askedTarget && { askedTarget: { at, reading: askedTarget.reading } }),
   };
 }

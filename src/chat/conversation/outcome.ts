@@ -1,6 +1,7 @@
 import type { AdditiveId } from '../../core/additives/additive-id.ts';
-import type { AskedField } from '../reader/understood.ts';
+import type { AskedField, Reading } from '../reader/understood.ts';
 import type { Button, Line } from '../replies/reply.ts';
+import type { InDoubt } from './doubt.ts';
 import type { Manner } from './manner.ts';
 import type { Answer } from './ports.ts';
 import type { Settings } from './settings.ts';
@@ -13,6 +14,8 @@ export interface Turn {
   readonly number: number;
   /** Additives whose cautions this person has had in full today. */
   readonly cautioned: ReadonlySet<string>;
+  /** Where the reading is a line of a round: what its own line says, and whether the additive stands above. */
+  readonly round?: { readonly own: Reading; readonly isOneAdditive: boolean };
 }
 
 /** What an intent makes of a reading. */
@@ -22,6 +25,8 @@ export interface Outcome {
   readonly buttons: readonly Button[];
   /** The field whose question stands in the reply and waits for its answer. */
   readonly waits?: AskedField;
+  /** The one figure in doubt, whose correction is waited for. */
+  readonly doubt?: InDoubt;
   /** Whether it asked for a target at a stage where nothing may wait. */
   readonly askedTarget?: true;
   /** The additive whose cautions the reply has in full. */

@@ -15,7 +15,8 @@ import type { Handled, IncomingMessage } from './ports.ts';
 import { chosen } from './press/chosen.ts';
 import { moreLines, safetyLines, workingOf } from './press/shown-again.ts';
 import type { Settings } from './settings.ts';
-import { choicesFor, letterAt, waitsFor } from './waiting.ts';
+import { choicesFor, letterAt, mayWaitFor, waitsFor } from './waiting.ts';
+import { mannerOf } from './manner.ts';
 
 /** A button that was pressed: it means the same however often, and an old or unknown one gets a kind line. */
 export function handlePress(
@@ -100,11 +101,13 @@ function askTarget(
   const { target: _target, ...fields } = reading.fields;
   const { assumed: _assumed, asks: _asks, ...draft } = reading;
   const without = finishReading({ ...draft, fields }, settings);
-  const next: Memory = {
-    ...memory,
-    waiting: waitFor('target', { number, reading: without, at: message.at }, settings),
-  };
-  const question = questionLine('target', without, settings, 'first');
+  const { waiting: _before, ...others } = memory;
+  // At a stage without a usual target nothing may wait: there it is to be written whole.
+  const next: Memory = mayWaitFor('target', without)
+    ? { ...others, waiting: waitFor('target', { number, reading: without, at: message.at }, settings) }
+    : { ...others, askedTarget: { at: message.at, reading: without }, lastButtons: [] };
+  const manner = mannerOf(without, markOf(memory), settings);
+  const question = questionLine('target', without, manner, settings, 'first');
   const ofWhich = line('first', 'target-of', { vessel: vesselText(reading) });
   return { ...saying(settings, [ofWhich, question]), writes: keeping(message, next) };
 }

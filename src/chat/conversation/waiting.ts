@@ -1,4 +1,5 @@
 import type { AdditiveId } from '../../core/additives/additive-id.ts';
+import { ADDITIVES } from '../../core/additives/additives.ts';
 import { STAGES_WITHOUT_TARGET } from '../../core/wine.ts';
 import type { AskedField, Fields, Reading } from '../reader/understood.ts';
 import type { Memory, Waiting } from './memory.ts';
@@ -11,12 +12,8 @@ export const WAITS_ms = 30 * 60 * 1000;
 const TABLET_SALT_g = [0.44, 0.55] as const;
 const TABLET_SO2_g = [2, 5] as const;
 
-/** What is meant where only "sulfite solution" or the like was said. */
-const ADDITIVES_AT_HAND: readonly AdditiveId[] = [
-  'potassium-metabisulfite-solution',
-  'potassium-bisulfite-solution',
-  'sulfur-dioxide-solution',
-];
+/** What is meant where only "sulfites", "sulfite solution" or the like was said, beside the usual additive. */
+const SOLUTIONS_AT_HAND: readonly AdditiveId[] = ['potassium-bisulfite-solution', 'sulfur-dioxide-solution'];
 
 /** The question that still waits at a moment; undefined when there is none or its half hour is over. */
 export function stillWaiting(memory: Memory, at: number): Waiting | undefined {
@@ -24,11 +21,15 @@ export function stillWaiting(memory: Memory, at: number): Waiting | undefined {
   return waiting !== undefined && at - waiting.askedAt <= WAITS_ms ? waiting : undefined;
 }
 
+/** Whether a question for that field may wait: one for a target only at a stage that has usual ones. */
+export function mayWaitFor(field: AskedField, { fields }: Reading): boolean {
+  return field !== 'target' || !STAGES_WITHOUT_TARGET.includes(fields.stage ?? 'finished');
+}
+
 /** The field that a reply to this reading asks for: the first that is missing, where it may wait at all. */
 export function waitsFor(reading: Reading): AskedField | undefined {
   const [field] = reading.asks;
-  const stage = reading.fields.stage ?? 'finished';
-  return field === 'target' && STAGES_WITHOUT_TARGET.includes(stage) ? undefined : field;
+  return field !== undefined && mayWaitFor(field, reading) ? field : undefined;
 }
 
 /** The values to choose from where a field has few, in the order of their letters. */
@@ -38,7 +39,17 @@ export function choicesFor(field: AskedField, reading: Reading, settings: Settin
   if (field !== 'additive') return [];
   if (reading.asks.includes('tablet_salt_g') || reading.fields.tablet_salt_g !== undefined)
     return [{ additive: 'potassium-metabisulfite' }, { additive: 'sodium-metabisulfite' }];
-  return [...new Set([settings.usualAdditive, ...ADDITIVES_AT_HAND])].map((additive) => ({ additive }));
+  const stock: AdditiveId = settings.usualAdditive.startsWith('sodium')
+    ? 'sodium-metabisulfite-solution'
+    : 'potassium-metabisulfite-solution';
+  // Who said "solution" means no powder.
+  const usual =
+    reading.marks.unnamedSolution && isPowder(settings.usualAdditive) ? [] : [settings.usualAdditive];
+  return [...new Set([...usual, stock, ...SOLUTIONS_AT_HAND])].map((additive) => ({ additive }));
+}
+
+function isPowder(additive: AdditiveId): boolean {
+  return ADDITIVES[additive].kind === 'powder';
 }
 
 /** `a`, `b`, `c` … → the fields that the letter stands for. */

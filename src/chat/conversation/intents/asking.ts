@@ -1,9 +1,9 @@
 import type { AskedField, Reading } from '../../reader/understood.ts';
-import type { DecimalMark } from '../../replies/number-text.ts';
 import type { Button, Line } from '../../replies/reply.ts';
 import { letterButtons } from '../buttons.ts';
 import { line } from '../lines/line.ts';
 import { questionLine } from '../lines/question.ts';
+import type { Manner } from '../manner.ts';
 import type { Turn } from '../outcome.ts';
 import type { Settings } from '../settings.ts';
 import { choicesFor, waitsFor } from '../waiting.ts';
@@ -19,15 +19,15 @@ export function questionFor(
   field: AskedField,
   { number, reading }: { readonly number: number; readonly reading: Reading },
   room: Line['room'],
-  mark: DecimalMark,
+  manner: Manner,
   settings: Settings,
 ): Question {
-  const buttons = letterButtons(number, field, choicesFor(field, reading, settings), mark);
+  const buttons = letterButtons(number, field, choicesFor(field, reading, settings), manner.mark);
   const options = buttons.map(({ mark: letter, label, values }) => ({
     ...line(room, 'option', { mark: letter }),
     list: [{ key: label, values }],
   }));
-  return { question: [questionLine(field, reading, settings, room), ...options], buttons };
+  return { question: [questionLine(field, reading, manner, settings, room), ...options], buttons };
 }
 
 /** The one question that a reply to this reading asks, and the field that waits for its answer. */
@@ -38,5 +38,5 @@ export function asking(
 ): Question & { readonly waits?: AskedField } {
   const field = waitsFor(reading);
   if (field === undefined) return { question: [], buttons: [] };
-  return { ...questionFor(field, { number, reading }, room, manner.mark, settings), waits: field };
+  return { ...questionFor(field, { number, reading }, room, manner, settings), waits: field };
 }

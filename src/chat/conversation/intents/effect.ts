@@ -11,7 +11,8 @@ import { line } from '../lines/line.ts';
 import { vesselText } from '../lines/vessel.ts';
 import { warningLines } from '../lines/warnings.ts';
 import { workingLines } from '../lines/working.ts';
-import { perLitre } from '../manner.ts';
+import { perLitre, type Manner } from '../manner.ts';
+import { shortened } from '../lines/problems.ts';
 import type { Outcome, Turn } from '../outcome.ts';
 import { additiveOf, toEffectRequest } from '../to-requests.ts';
 import { massText } from '../../replies/quantity-text.ts';
@@ -49,14 +50,22 @@ export function answerEffect(reading: Reading, turn: Turn): Outcome {
   };
 }
 
+/** The rate as the person wrote it, where the whole of it is known; else per hectolitre. */
+function rateText({ fields, where }: Reading, { mark }: Manner): string {
+  const written = where.rate_mg_L?.text ?? '';
+  if (/\d.*(\/|\s\p{L}+\s).*\p{L}/u.test(written)) return shortened(written);
+  return `${massText((fields.rate_mg_L ?? 0) / 10, mark)}/hL`;
+}
+
 function firstOfEffect(reading: Reading, answer: EffectAnswer, { manner }: Turn): Line[] {
   const { fields } = reading;
   const additive = fields.additive ?? reading.assumed.additive ?? 'potassium-metabisulfite';
   const values = { vessel: vesselText(reading), adds: perLitre(answer.adds_mg_L ?? 0, manner) };
   const volume_L = fields.volume_L ?? reading.assumed.volume_L;
   if (fields.rate_mg_L !== undefined) {
-    const rate = `${massText(fields.rate_mg_L / 10, manner.mark)}/hL`;
-    const first = line('first', 'adds-rate', { ...values, rate, additive });
+    const rate = rateText(reading, manner);
+    const ofAdditive = perLitre(fields.rate_mg_L, manner);
+    const first = line('first', 'adds-rate', { ...values, rate, ofAdditive, additive });
     if (answer.mass_g === undefined || volume_L === undefined) return [first];
     const volume = volumeText(volume_L, manner.volumeUnit, manner.mark);
     const amount = massText(answer.mass_g, manner.mark);

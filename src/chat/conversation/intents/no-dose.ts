@@ -6,6 +6,7 @@ import { factLines } from '../lines/facts.ts';
 import { line } from '../lines/line.ts';
 import { questionLine } from '../lines/question.ts';
 import { vesselText } from '../lines/vessel.ts';
+import { wholeExample } from '../lines/whole-example.ts';
 import { molecularPerLitre } from '../manner.ts';
 import type { Outcome, Turn } from '../outcome.ts';
 
@@ -49,7 +50,7 @@ function noSulfiteNow(
       first,
       ...molecular,
       why,
-      line('effect', 'no-dose-all-the-same', { stage }),
+      line('effect', 'no-dose-all-the-same', wholeExample(reading, turn.manner, turn.settings)),
       ...echo(reading, turn),
     ],
     buttons: [],
@@ -59,7 +60,7 @@ function noSulfiteNow(
 
 function askHowMuch(reading: Reading, answer: DoseAnswer, turn: Turn): Outcome {
   const vessel = vesselText(reading);
-  const question = questionLine('target', reading, turn.settings, 'first');
+  const question = questionLine('target', reading, turn.manner, turn.settings, 'first');
   return {
     answer,
     inRound: [line('first', 'round-target-stage', { vessel })],

@@ -1,15 +1,18 @@
 import type { Reading } from '../../reader/understood.ts';
+import { doubtOf } from '../doubt.ts';
 import { line } from '../lines/line.ts';
 import { problemLines, shortened } from '../lines/problems.ts';
 import { vesselText } from '../lines/vessel.ts';
-import type { Outcome } from '../outcome.ts';
+import type { Outcome, Turn } from '../outcome.ts';
 
 /** A message with something wrong in it: what, and what to send instead; never a figure beside it. */
-export function answerProblem(reading: Reading): Outcome {
-  const lines = problemLines(reading, vesselText(reading));
+export function answerProblem(reading: Reading, { manner }: Turn): Outcome {
+  const doubt = doubtOf(reading);
+  const again = doubt === undefined ? 'whole' : 'correction';
+  const lines = problemLines(reading, vesselText(reading), manner.mark, again);
   const unread = reading.problems.find(({ code }) => code === 'not-understood');
   const inRound = unread
     ? [line('first', 'round-not-understood', { about: shortened(unread.about) })]
     : lines.slice(0, 1);
-  return { answer: null, inRound, lines, buttons: [] };
+  return { answer: null, inRound, lines, buttons: [], ...(doubt && { doubt }) };
 }

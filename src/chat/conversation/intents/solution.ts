@@ -26,6 +26,8 @@ export function answerSolution(reading: Reading, turn: Turn): Outcome {
   if (answer.salt_g === undefined && answer.strength_SO2_g_per_100_mL === undefined)
     return noRecipe(reading, turn);
   const { id } = request.additive;
+  if (answer.salt_g === undefined && answer.additive_volume_mL === undefined)
+    return fromPowder(reading, turn);
   const inFull = !turn.cautioned.has(id);
   const first = firstOfSolution(answer, id, turn);
   return {
@@ -51,6 +53,14 @@ function noRecipe(reading: Reading, { manner }: Turn): Outcome {
   return { answer: null, inRound: [first], lines: [first, ...factLines(reading, manner)], buttons: [] };
 }
 
+/** A solution that is bought as it is cannot be made up here: only a stock of powder can. */
+function fromPowder(reading: Reading, { manner }: Turn): Outcome {
+  const written = reading.where.volume_L?.text;
+  const volume = written ?? volumeText(reading.fields.volume_L ?? 0, manner.volumeUnit, manner.mark);
+  const first = line('first', 'solution-from-powder', { volume });
+  return { answer: null, inRound: [first], lines: [first, ...factLines(reading, manner)], buttons: [] };
+}
+
 function strengthLine({ strength_SO2_g_per_100_mL: SO2_g }: SolutionAnswer, { manner }: Turn): Line[] {
   if (SO2_g === undefined) return [];
   return [line('effect', 'solution-strength', { strength: numberText(SO2_g, 2, manner.mark) })];
@@ -69,8 +79,6 @@ function firstOfSolution(answer: SolutionAnswer, id: AdditiveId, { manner }: Tur
     const amount = answer.measure ? measureText(answer.measure, mark) : massText(answer.salt_g, mark);
     return line('first', 'solution-weigh', { ...values, amount, additive: whatGoesIn(id) });
   }
-  if (answer.additive_volume_mL === undefined)
-    return line('first', 'solution-bought', { ...values, additive: id });
-  const amount = additiveVolumeText(answer.additive_volume_mL, mark);
+  const amount = additiveVolumeText(answer.additive_volume_mL ?? 0, mark);
   return line('first', 'solution-measure', { ...values, amount, additive: id });
 }

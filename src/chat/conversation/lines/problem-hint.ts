@@ -34,7 +34,8 @@ const NUMBER = /\d+(?:[.,]\d+)?/g;
 export function hintFor(reading: Reading, about: string, mark: DecimalMark): Hint {
   const [first = '', second = ''] = about.match(NUMBER) ?? [];
   const none = { one: first, two: second, named: '' };
-  const { additive } = reading.fields;
+  const { fields } = reading;
+  const { additive } = fields;
   const split = /(\d)[.,]\s+(\d+)/.exec(about);
   if (split) return { ...none, kind: 'split', one: `${split[1]}${mark}${split[2]}` };
   const thousands = /^\D*?(\d{1,3})[.,](\d{3})\s*(\p{L}[\p{L}\d]*)?$/u.exec(about);
@@ -44,7 +45,9 @@ export function hintFor(reading: Reading, about: string, mark: DecimalMark): Hin
   if (/^\D*\d[\d.,]*\s*[-–]\s*\d/.test(about)) return { ...none, kind: isPh(first) ? 'other' : 'range' };
   if (/^\d+\s*\/\s*\d+/.test(about)) return { ...none, kind: 'pair' };
   if (second !== '' && /^\d+\s+\p{L}+\s+\d+$/u.test(about)) return { ...none, kind: 'to' };
-  return ofConcentration(about, first, additive === undefined ? '' : (reading.where.additive?.text ?? ''));
+  const named = additive === undefined ? '' : (reading.where.additive?.text ?? '');
+  const hint = ofConcentration(about, first, named);
+  return hint.kind === 'free' && fields.free_mg_L !== undefined ? { ...hint, kind: 'other' } : hint;
 }
 
 function isPh(text: string): boolean {

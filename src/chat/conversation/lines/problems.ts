@@ -1,17 +1,32 @@
 import type { ProblemCode } from '../../../core/problem.ts';
 import type { Reading } from '../../reader/understood.ts';
+import type { DecimalMark } from '../../replies/number-text.ts';
 import type { Line } from '../../replies/reply.ts';
 import type { SentenceKey } from '../../replies/sentence-keys.ts';
 import { line } from './line.ts';
 import { noteText } from './notes.ts';
+import { hintFor } from './problem-hint.ts';
 
-/** Each problem in a sentence with what to send instead; beside one no figure is given. */
-export function problemLines(reading: Reading, vessel: string): Line[] {
+/**
+ * Each problem in a sentence with what to send instead; beside one no figure is given.
+ *
+ * @param again what has to be sent: the correction alone, or the whole line once more
+ */
+export function problemLines(
+  reading: Reading,
+  vessel: string,
+  mark: DecimalMark,
+  again: 'correction' | 'whole',
+): Line[] {
   const lines = reading.problems.map(({ code, about }) =>
-    line('first', keyOf(code, about, reading), { vessel, about: shortened(about), kind: kindOf(about) }),
+    line('first', keyOf(code, about, reading), {
+      vessel,
+      about: shortened(about),
+      ...hintFor(reading, about, mark),
+    }),
   );
   const only = reading.problems.every(({ code }) => code === 'not-understood' || code === 'too-long');
-  return only ? lines : [...lines, line('question', 'problem-no-number')];
+  return only ? lines : [...lines, line('question', 'problem-no-number', { again })];
 }
 
 /** The sentence for a problem; some have one that knows more of the matter. */
@@ -21,20 +36,9 @@ function keyOf(code: ProblemCode, about: string, reading: Reading): SentenceKey 
   const isVolume = about === reading.where.volume_L?.text;
   if (code === 'ambiguous-number' && isVolume && noteText(reading, 'each-or-total') !== undefined)
     return 'problem-each-or-total';
+  // A share is written as a fraction; what no cellar has is another matter.
+  if (code === 'value-out-of-range' && /\d\s*\/\s*\d/.test(about)) return 'problem-share';
   return `problem-${code}`;
-}
-
-/** Which kind of figure can be read in more than one way, by the look of it: each has its own way to write it plainly. */
-const KINDS: readonly (readonly [RegExp, string])[] = [
-  [/%/, 'percent'],
-  [/°/, 'degree'],
-  [/g\s*(\/|per)\s*h|g\/L|ppm|mg/i, 'rate'],
-  [/^\D*\d{1,3}[.,]\d{3}(\D|$)/, 'thousands'],
-  [/\d\s*[-–]\s*\d/, 'range'],
-];
-
-function kindOf(about: string): string {
-  return KINDS.find(([pattern]) => pattern.test(about))?.[1] ?? 'other';
 }
 
 /** The person's own words, cut where they would fill the screen. */

@@ -1,40 +1,47 @@
+import { STAGES_WITHOUT_TARGET } from '../../../core/wine.ts';
 import type { AskedField, Reading } from '../../reader/understood.ts';
 import type { Line } from '../../replies/reply.ts';
+import type { Manner } from '../manner.ts';
 import type { Settings } from '../settings.ts';
 import { vesselText } from './vessel.ts';
 import { noteText } from './notes.ts';
+import { wholeExample } from './whole-example.ts';
 
 /** The one question for a field, with an example of an answer. */
 export function questionLine(
   field: AskedField,
   reading: Reading,
+  manner: Manner,
   settings: Settings,
   room: Line['room'] = 'question',
 ): Line {
-  const { key, values } = questionOf(field, reading, settings);
+  const { key, values } = questionOf(field, reading, manner, settings);
   return { room, key, values: { vessel: vesselText(reading), ...values } };
 }
 
-function questionOf(field: AskedField, reading: Reading, settings: Settings): Omit<Line, 'room'> {
-  const unit = reading.concentrationUnit === 'ppm' ? 'ppm' : 'mg/L';
+function questionOf(
+  field: AskedField,
+  reading: Reading,
+  manner: Manner,
+  settings: Settings,
+): Omit<Line, 'room'> {
   if (field === 'volume_L') {
-    const each = noteText(reading, 'each-or-total');
-    if (each !== undefined) return { key: 'ask-each-or-total', values: { text: each } };
     if (noteText(reading, 'fruit-by-weight') !== undefined) return { key: 'ask-fruit', values: {} };
     return { key: 'ask-volume_L', values: { unit: settings.volumeUnit } };
   }
-  if (field === 'target') return targetQuestion(reading);
+  if (field === 'target') return targetQuestion(reading, manner, settings);
   if (field === 'additive' && reading.asks.includes('tablet_salt_g'))
     return { key: 'ask-tablet-additive', values: {} };
   if (field === 'mass_g' && noteText(reading, 'spoon') !== undefined)
     return { key: 'ask-mass-spoon', values: {} };
-  return { key: `ask-${field}`, values: { unit } };
+  return { key: `ask-${field}`, values: { unit: manner.unit } };
 }
 
 /** At some stages it is asked what is added; and some wine has no usual target, which is said. */
-function targetQuestion({ fields }: Reading): Omit<Line, 'room'> {
-  if (fields.stage === 'must' || fields.stage === 'base')
-    return { key: 'ask-target-stage', values: { stage: fields.stage } };
+function targetQuestion(reading: Reading, manner: Manner, settings: Settings): Omit<Line, 'room'> {
+  const { fields } = reading;
+  if (STAGES_WITHOUT_TARGET.includes(fields.stage ?? 'finished'))
+    return { key: 'ask-target-stage', values: wholeExample(reading, manner, settings) };
   const unusual = fields.category === 'sparkling' || fields.category === 'fortified';
   return {
     key: 'ask-target',

@@ -1,0 +1,48 @@
+import { foldText } from '../reader/fold-text.ts';
+import { joinNumbers } from '../reader/join-numbers.ts';
+import { LEXICON } from '../reader/lexicon.ts';
+import { readDraft } from '../reader/read-draft.ts';
+import { setBoard } from '../reader/read-message.ts';
+import { splitTerms } from '../reader/split-terms.ts';
+import type { AskedField, Draft, FieldName, Reading, ReaderSettings } from '../reader/understood.ts';
+
+/** More words than this are no answer but talk; own threshold. */
+const MOST_TERMS = 7;
+
+/** A line of a round has not more. */
+const MOST_TERMS_A_LINE = 40;
+
+/** What an answer to a question for a name may hold: alone none of it is a message with a business of its own. */
+const ANSWERS: Readonly<Partial<Record<AskedField, readonly FieldName[]>>> = {
+  vessel: ['vessel', 'vessels'],
+  additive: ['additive', 'strength_percent'],
+  strength_percent: ['additive', 'strength_percent'],
+};
+
+function draftOf(text: string, most: number, settings: ReaderSettings): Draft | undefined {
+  const folded = foldText(text);
+  const terms = joinNumbers(splitTerms(folded, LEXICON));
+  return terms.length > most ? undefined : readDraft(setBoard(text, folded, terms, settings));
+}
+
+/**
+ * The answer to a question for a vessel, an additive or its strength, which alone would be talk: `T4`, `kmbs`,
+ * `potassium bisulfite salt 30%`. Undefined where it names none of what is asked.
+ */
+export function answerOfNames(
+  text: string,
+  field: AskedField,
+  settings: ReaderSettings,
+): Partial<Reading> | undefined {
+  const wanted = ANSWERS[field];
+  const draft = wanted && !text.includes('?') ? draftOf(text, MOST_TERMS, settings) : undefined;
+  if (wanted === undefined || draft === undefined || draft.problems.length > 0) return undefined;
+  const names = Object.keys(draft.fields) as FieldName[];
+  return names.length > 0 && names.every((name) => wanted.includes(name)) ? draft : undefined;
+}
+
+/** The vessel that a line names; undefined where it names none. */
+export function vesselIn(text: string, settings: ReaderSettings): string | undefined {
+  const fields = draftOf(text, MOST_TERMS_A_LINE, settings)?.fields;
+  return fields?.vessel ?? fields?.vessels?.join();
+}
