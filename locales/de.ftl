@@ -3,4 +3,5 @@
 emergency-out = ALLE RAUS an die frische Luft, sofort.
 emergency-nobody-in = Niemand steigt oder beugt sich jemandem hinterher.
 emergency-call = Den Notruf wählen.
+emergency-swallowed = Verschluckt: Mund ausspülen, nicht zum Erbrechen bringen, Giftnotruf oder Notruf wählen.
 emergency-eyes = Augen: 15 Minuten mit Wasser spülen, Kontaktlinsen heraus.

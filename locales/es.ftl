@@ -3,4 +3,5 @@
 emergency-out = TODOS FUERA, al aire libre, ya.
 emergency-nobody-in = Nadie entra ni se asoma detrás de nadie.
 emergency-call = Llamad a emergencias.
+emergency-swallowed = Tragado: enjuagar la boca, no provocar el vómito, llamar a toxicología o a emergencias.
 emergency-eyes = Ojos: enjuagar con agua 15 minutos y quitar las lentillas.

@@ -3,4 +3,5 @@
 emergency-out = TOUT LE MONDE DEHORS, à l’air libre, tout de suite.
 emergency-nobody-in = Personne n’entre ni ne se penche pour aller chercher quelqu’un.
 emergency-call = Appelez les secours.
+emergency-swallowed = Avalé : rincer la bouche, ne pas faire vomir, appeler le centre antipoison ou les secours.
 emergency-eyes = Yeux : rincer à l’eau pendant 15 minutes, enlever les lentilles.
