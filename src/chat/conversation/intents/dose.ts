@@ -7,13 +7,14 @@ import { choiceButtons, doseButtons } from '../buttons.ts';
 import { assumedLines } from '../lines/assumed.ts';
 import { cautionLines } from '../lines/cautions.ts';
 import { choiceLines } from '../lines/choice.ts';
-import { conditionLines, redFigures, redValues } from '../lines/condition.ts';
+import { conditionLines, redFigures } from '../lines/condition.ts';
 import { expectationLines } from '../lines/expectation.ts';
 import { factLines } from '../lines/facts.ts';
 import { firstOfDose, hasAmount } from '../lines/first-dose.ts';
 import { line } from '../lines/line.ts';
 import { numberText } from '../../replies/number-text.ts';
 import { nothingLines, saidNothingNeeded } from '../lines/nothing-needed.ts';
+import { roundDoseLine, roundNothingLine } from '../lines/round-dose.ts';
 import { vesselText } from '../lines/vessel.ts';
 import { warningLines } from '../lines/warnings.ts';
 import { workingLines } from '../lines/working.ts';
@@ -51,16 +52,18 @@ function wholeDose(reading: Reading, request: DoseRequest, answer: DoseAnswer, t
   const { manner, number } = turn;
   const inFull = !turn.cautioned.has(additive.id);
   const first = firstOfDose(vesselText(reading), answer, additive, manner);
-  const red = redFigures(answer);
   const condition = conditionLines(reading, answer, manner);
   return {
     answer,
     inRound: [
-      ...first,
-      ...(red
-        ? [line('first', 'round-red', { vessel: vesselText(reading), ...redValues(red, manner) })]
-        : []),
-      ...warningLines(answer.warnings, manner, 'first'),
+      ...roundDoseLine(
+        vesselText(reading),
+        turn.round?.own ?? reading,
+        answer,
+        turn.round?.isOneAdditive ? undefined : additive.id,
+        manner,
+      ),
+      ...warningLines(answer.warnings, manner, 'first', ['free-low-may-bind-all']),
     ],
     lines: [
       ...first,
@@ -130,7 +133,7 @@ function nothing(reading: Reading, answer: DoseAnswer, turn: Turn): Outcome {
   const first = nothingLines(reading, answer, manner);
   return {
     answer,
-    inRound: first.slice(0, 1),
+    inRound: roundNothingLine(vesselText(reading), turn.round?.own ?? reading, manner),
     lines: [
       ...first,
       ...conditionLines(reading, answer, manner),

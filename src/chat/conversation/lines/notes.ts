@@ -29,7 +29,9 @@ export function noteParts(reading: Reading, manner: Manner): Omit<Line, 'room'>[
   );
   return told
     .flatMap((id) => reading.notes.flatMap((note) => (note.id === id ? [{ id, text: note.text }] : [])))
-    .map(({ id, text }) => part(`note-${id}`, { text, factor: saltFactor(reading, manner) }));
+    .map(({ id, text }) =>
+      part(`note-${id}`, id === 'strength-as-salt' ? { factor: saltFactor(reading, manner) } : { text }),
+    );
 }
 
 /** The person's words of a note, where the reading has it. */

@@ -21,6 +21,8 @@ function vesselsText(reading: Reading, vessels: readonly string[]): string {
 }
 
 function asName(written: string, otherwise: string): string {
+  // A line of a round goes by its own words.
+  if (written === otherwise && written.includes(' ')) return written;
   const oneLine = written.replace(/[\p{C}\s]+/gu, ' ').trim();
   const name = oneLine === '' || oneLine.length > LONGEST ? otherwise : oneLine;
   if (!/[\p{L}]{4,}/u.test(name)) return name.toUpperCase();
