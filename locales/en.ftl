@@ -318,7 +318,14 @@ ask-target-stage =
     }
 ask-tablet-additive = { at }which salt are the tablets? It stands on the packet.
 ask-additive = { at }which additive is it?
-ask-strength_percent = { at }how strong is it, in %? It stands on the label. Like: 10%
+ask-strength_percent = { at }how strong is it, in %? It stands on the label. Like: { usual-strength }
+usual-strength =
+    { $named ->
+        [potassium-metabisulfite] 96%
+        [sodium-metabisulfite] 96%
+        [sulfur-dioxide-solution] 6%
+       *[other] 10%
+    }
 ask-tablet_salt_g = { at }how many grams is one tablet? It stands on the packet; 0.44 and 0.55 are usual.
 ask-tablet_SO2_g = { at }how many grams of SO2 does one effervescent tablet give? It stands on the packet.
 ask-mass_g = { at }how many grams?
@@ -335,7 +342,7 @@ target-of =
 
 problem-ph-out-of-range = { at }“{ $about }” cannot be the pH of a wine: I take 2.5 to 4.8. A lost point? Send it like: pH 3.58
 problem-negative-value = { at }“{ $about }” is below zero, that cannot be. Send the figure again without the minus.
-problem-total-below-free = { at }the total is below the free (“{ $about }”). Free goes first: 18/60, or free 18 total 60
+problem-total-below-free = { at }the total is below the free (“{ $about }”). Turned round? Write: free { $one } total { $two }
 problem-volume-not-positive = { at }a volume of “{ $about }” cannot be. Send it like: 1450 gal
 problem-unit-mismatch = { at }the unit does not fit in “{ $about }”. Free SO2 is in mg/L or ppm, volume in L, hl or gal.
 problem-ambiguous-number =
@@ -372,7 +379,7 @@ problem-each-or-total = { at }is “{ $about }” of each, or of all together? W
 problem-conflicting-values = { at }two values for one thing: “{ $about }”. Send one of them; two wines go on a line each.
 problem-unknown-additive = { at }“{ $about }” is no SO2 additive that I know. I know: potassium or sodium metabisulfite (powder, solution), bisulfite, SO2 in water, SO2 gas, tablets.
 problem-did-you-mean = { at }“{ $about }” is another chemical. Did you mean metabisulfite? Then write metabisulfite.
-problem-strength-out-of-range = { at }the strength “{ $about }” does not fit that additive. Look at the label and send it like: 10% kmbs
+problem-strength-out-of-range = { at }the strength “{ $about }” does not fit that additive. Look at the label. Like: { usual-strength }
 problem-value-out-of-range = { at }“{ $about }” is more than any cellar has. Check the figure and its unit.
 problem-not-understood = I could not read that. Send a reading like: T4 1450 gal pH 3.58 free 21. ? shows more.
 problem-too-long = That is too long to read safely. Send at most 25 vessels at a time, a line each.
@@ -384,6 +391,7 @@ problem-no-number =
 problem-share = { at }“{ $about }”: I reckon with at most 4/5 (0.8) that binds.
 problem-vessel-twice = { $vessel } stands twice: send it once.
 problem-two-vessels = “{ $about }”: two vessels. Send a line for each.
+no-such-choice = There is no { $text } here: a to { $last }, or its name.
 no-such-button = There is no { $text } here: 1 to { $last }, or a whole reading.
 
 ## Warnings

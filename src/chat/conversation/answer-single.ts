@@ -1,6 +1,7 @@
 import type { Reading, Understood } from '../reader/understood.ts';
 import type { Reply } from '../replies/reply.ts';
 import { answerReading } from './answer-reading.ts';
+import { isBareNumber } from './bare-number.ts';
 import { belongs } from './complete.ts';
 import { questionFor } from './intents/asking.ts';
 import { line } from './lines/line.ts';
@@ -90,7 +91,7 @@ function askAgain(
 ): Pick<Outcome, 'lines' | 'buttons'> {
   const nods = reading.intent === 'chat' && reading.topic === 'thanks';
   if (!nods && reading.problems.length === 0) return outcome;
-  const said = nods ? [line('first', 'still-asked')] : outcome.lines;
+  const said = nods ? [line('first', 'still-asked')] : slipLines(waiting, reading, outcome);
   if (waiting.doubt !== undefined) {
     const doubtful: Reading = { ...waiting.reading, problems: waiting.doubt.problems };
     const doubt = problemLines(doubtful, vesselText(waiting.reading), manner.mark, 'correction');
@@ -100,4 +101,12 @@ function askAgain(
   }
   const { question, buttons } = questionFor(waiting.field, waiting, 'question', manner, settings);
   return { lines: [...said, ...question], buttons };
+}
+
+/** What was wrong with an answer; a number is none to a question whose choices carry letters. */
+function slipLines(waiting: Waiting, { problems }: Reading, outcome: Outcome): Outcome['lines'] {
+  const text = problems[0]?.about ?? '';
+  const last = Object.keys(waiting.letters).at(-1);
+  if (waiting.field !== 'additive' || last === undefined || !isBareNumber(text)) return outcome.lines;
+  return [line('first', 'no-such-choice', { text, last })];
 }

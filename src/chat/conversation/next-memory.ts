@@ -66,7 +66,9 @@ export function nextMemory(
     .map(({ one, number }) => ({ number, reading: one.reading, at }));
   const today = dayOf(at);
   const cautioned = said.flatMap(({ outcome }) => outcome.cautioned ?? []);
-  const askedTarget = said.find(({ outcome }) => outcome.askedTarget);
+  const asked = said.find(({ outcome }) => outcome.askedTarget)?.reading;
+  const isTalk = said.every(({ reading }) => reading.intent === 'chat');
+  const askedTarget = asked ? { at, reading: asked } : isTalk ? memory.askedTarget : undefined;
   const stillToday = Object.entries(memory.cautionedOn).filter(([, day]) => day === today);
   return {
     remembered: [...memory.remembered, ...remembered].slice(-REMEMBERED),
@@ -76,6 +78,6 @@ export function nextMemory(
     decimalMark: understood.decimalMark,
     ...(waiting && { waiting }),
     ...concentrationOf(said, memory),
-    ...(askedTarget && { askedTarget: { at, reading: askedTarget.reading } }),
+    ...(askedTarget && { askedTarget }),
   };
 }

@@ -96,7 +96,7 @@ function withNames(understood: Understood, text: string, waiting: Waiting, setti
   const [only, another] = understood.readings;
   if (only === undefined || another !== undefined || only.intent !== 'chat' || only.topic !== undefined)
     return understood;
-  const names = answerOfNames(text, waiting.field, settings);
+  const names = answerOfNames(text, waiting, settings);
   if (names === undefined) return understood;
   return { ...understood, readings: [{ ...only, ...names, intent: waiting.reading.intent, problems: [] }] };
 }

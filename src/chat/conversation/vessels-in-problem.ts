@@ -12,10 +12,10 @@ function namedTwice(text: string, settings: ReaderSettings): string | undefined 
   if (lines.length < 2 || lines.length > MOST_LINES) return undefined;
   const seen = new Set<string>();
   for (const one of lines) {
-    const vessel = vesselIn(one, settings);
-    if (vessel === undefined) continue;
-    if (seen.has(vessel)) return vessel;
-    seen.add(vessel);
+    const named = vesselIn(one, settings);
+    if (named === undefined) continue;
+    if (seen.has(named.vessel)) return named.written;
+    seen.add(named.vessel);
   }
   return undefined;
 }
@@ -34,7 +34,7 @@ export function vesselsProblem(
   if (vessel !== undefined) return line('first', 'problem-vessel-twice', { vessel });
   const [about] = problems.flatMap((one) => (one.code === 'conflicting-values' ? [one.about] : []));
   const parts = about?.split(/\s+\/\s+|\s+/) ?? [];
-  const vessels = new Set(parts.map((part) => vesselIn(part, settings)));
+  const vessels = new Set(parts.map((part) => vesselIn(part, settings)?.vessel));
   if (about === undefined || vessels.size < 2 || vessels.has(undefined)) return undefined;
   return line('first', 'problem-two-vessels', { about });
 }

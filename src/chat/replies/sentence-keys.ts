@@ -19,7 +19,7 @@ export interface SentenceValues {
   'ask-mass-spoon': 'vessel';
   'ask-mass_g': 'vessel';
   'ask-ph': 'vessel';
-  'ask-strength_percent': 'vessel';
+  'ask-strength_percent': 'named' | 'vessel';
   'ask-tablet-additive': 'vessel';
   'ask-tablet_SO2_g': 'vessel';
   'ask-tablet_salt_g': 'vessel';
@@ -165,6 +165,7 @@ export interface SentenceValues {
   'no-dose-why': never;
   'no-dose-why-fermenting': never;
   'no-such-button': 'last' | 'text';
+  'no-such-choice': 'last' | 'text';
   'not-kept-addition': never;
   'not-kept-reading': never;
   'not-served': never;
@@ -192,9 +193,9 @@ export interface SentenceValues {
   'problem-not-understood': never;
   'problem-ph-out-of-range': 'about' | 'vessel';
   'problem-share': 'about' | 'vessel';
-  'problem-strength-out-of-range': 'about' | 'vessel';
+  'problem-strength-out-of-range': 'about' | 'named' | 'vessel';
   'problem-too-long': never;
-  'problem-total-below-free': 'about' | 'vessel';
+  'problem-total-below-free': 'about' | 'one' | 'two' | 'vessel';
   'problem-two-vessels': 'about';
   'problem-unit-mismatch': 'about' | 'vessel';
   'problem-unknown-additive': 'about' | 'vessel';
@@ -279,6 +280,7 @@ export interface SentenceValues {
   'terminal-start-more': never;
   'third-needs': 'third';
   unreadable: 'what';
+  'usual-strength': 'named';
   'warning-addition-large': 'dose_mg_L' | 'unit';
   'warning-additive-not-permitted': 'additive';
   'warning-already-dosed': never;

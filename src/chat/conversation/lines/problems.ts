@@ -22,7 +22,7 @@ export function problemLines(
     line('first', keyOf(code, about, reading), {
       vessel,
       about: shortened(about),
-      ...hintFor(reading, about, mark),
+      ...(code === 'total-below-free' ? swapped(about) : hintFor(reading, about, mark)),
     }),
   );
   const only = reading.problems.every(({ code }) => code === 'not-understood' || code === 'too-long');
@@ -39,6 +39,13 @@ function keyOf(code: ProblemCode, about: string, reading: Reading): SentenceKey 
   // A share is written as a fraction; what no cellar has is another matter.
   if (code === 'value-out-of-range' && /\d\s*\/\s*\d/.test(about)) return 'problem-share';
   return `problem-${code}`;
+}
+
+/** The two figures of a total below the free, the other way round: so they are right. */
+function swapped(about: string): Line['values'] {
+  const figures = about.match(/\d+(?:[.,]\d+)?/g) ?? [];
+  const order = figures.toSorted((a, b) => Number(a.replace(',', '.')) - Number(b.replace(',', '.')));
+  return { one: order[0] ?? '', two: order.at(-1) ?? '' };
 }
 
 /** The person's own words, cut where they would fill the screen. */

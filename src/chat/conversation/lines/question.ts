@@ -34,6 +34,8 @@ function questionOf(
     return { key: 'ask-tablet-additive', values: {} };
   if (field === 'mass_g' && noteText(reading, 'spoon') !== undefined)
     return { key: 'ask-mass-spoon', values: {} };
+  if (field === 'strength_percent')
+    return { key: 'ask-strength_percent', values: { named: reading.fields.additive ?? 'other' } };
   return { key: `ask-${field}`, values: { unit: manner.unit } };
 }
 
