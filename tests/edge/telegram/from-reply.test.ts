@@ -82,6 +82,7 @@ describe('splitText()', () => {
     ['leaves a short text whole', 'one\ntwo', 10, ['one\ntwo']],
     ['cuts at the last line that fits', 'one\ntwo\nsix', 8, ['one\ntwo', 'six']],
     ['takes a line that fits exactly', 'one\ntwo', 3, ['one', 'two']],
+    ['cuts after a line of one sign', 'a\nbb c', 4, ['a', 'bb c']],
     ['cuts a long line at a space', 'one two six', 8, ['one two', 'six']],
     ['cuts a long word anywhere', 'abcdefgh', 3, ['abc', 'def', 'gh']],
     ['never cuts through a character of two units', '🍷🍷🍷', 3, ['🍷', '🍷', '🍷']],

@@ -1,0 +1,17 @@
+import { expect, test } from 'vitest';
+
+import { isServed, whoOf } from '../../../src/edge/telegram/who-of.ts';
+
+test('a chat and the person in it have names of their own, and each chat is a cellar', () => {
+  const who = whoOf({ id: -100, type: 'group' }, { id: 7 });
+  expect(who).toEqual({ cellar: 'telegram:-100', chat: 'telegram:-100', person: 'telegram:7' });
+});
+
+test.each([
+  ['private', true],
+  ['group', false],
+  ['supergroup', false],
+  ['channel', false],
+])('in a chat of the kind %s the bot speaks: %s', (type, served) => {
+  expect(isServed({ id: 1, type })).toBe(served);
+});
