@@ -134,7 +134,7 @@ condition-stage = Only if malolactic is finished or not wanted.
 condition-red =
     { $kind ->
         [none] If it is red (0.6 molecular): nothing to add.
-        [over] If it is red (0.6 molecular): { bare-amount }, also over { $limit }.
+        [over] If red (0.6 molecular): { bare-amount }, also over { $limit }.
        *[other] If it is red (0.6 molecular): { bare-amount }.
     }
 no-dose-fermenting = { at }no sulfite now, it is still fermenting.
@@ -378,7 +378,7 @@ stock-name =
 problem-each-or-total = { at }is “{ $about }” of each, or of all together? Write: { $about } each, or: { $about } total
 problem-conflicting-values = { at }two values for one thing: “{ $about }”. Send one of them; two wines go on a line each.
 problem-unknown-additive = { at }“{ $about }” is no SO2 additive that I know. I know: potassium or sodium metabisulfite (powder, solution), bisulfite, SO2 in water, SO2 gas, tablets.
-problem-did-you-mean = { at }“{ $about }” is another chemical. Did you mean metabisulfite? Then write metabisulfite.
+problem-did-you-mean = { at }“{ $about }” is another chemical. Did you mean metabisulfite?
 problem-strength-out-of-range = { at }the strength “{ $about }” does not fit that additive. Look at the label. Like: { usual-strength }
 problem-value-out-of-range = { at }“{ $about }” is more than any cellar has. Check the figure and its unit.
 problem-not-understood = I could not read that. Send a reading like: T4 1450 gal pH 3.58 free 21. ? shows more.
@@ -405,7 +405,7 @@ warning-stage-not-over =
 warning-additive-not-permitted =
     { $additive ->
         [ammonium-bisulfite-solution] ⚠ Ammonium bisulfite is for grapes and must only (OIV): not for this wine; ask first.
-       *[sodium] ⚠ Sodium metabisulfite is not allowed in wine everywhere (not under OIV; EU and UK likewise, from memory): ask first.
+       *[sodium] ⚠ Sodium metabisulfite: many rules bar it from wine (OIV; EU, UK from memory). Ask first.
     }
 warning-total-over-limit =
     { $total ->
@@ -617,7 +617,7 @@ choice-powder = { $value ->
     }
 choice-tablet_salt_g = { $value } g
 choice-tablet_SO2_g = { $value } g
-folded = Working and the rest of the warnings: press More.
+folded = Working, other warnings: press More.
 terminal-start = brimnote reckons SO2 additions. Type a reading, like:
 terminal-start-example =     T4 1450 gal pH 3.58 free 21
 terminal-start-more = ? shows more, Ctrl-D ends. Several lines pasted together are one message.

@@ -1,4 +1,4 @@
-import type { Reading, Understood } from '../reader/understood.ts';
+import type { FieldName, Reading, Understood } from '../reader/understood.ts';
 import type { Reply } from '../replies/reply.ts';
 import { answerReading } from './answer-reading.ts';
 import { isBareNumber } from './bare-number.ts';
@@ -78,7 +78,14 @@ function waitingFor(
 /** Talk in between leaves a question waiting, and so does a slip in the answer to it. */
 function keepsWaiting(reading: Reading, waiting: Waiting | undefined): Waiting | undefined {
   if (!waiting || reading.intent === 'chat') return waiting;
-  return reading.problems.length > 0 && belongs(waiting.reading, reading) ? waiting : undefined;
+  return reading.problems.length > 0 && isSlip(waiting.reading, reading) ? waiting : undefined;
+}
+
+/** An answer with something wrong in it says little else; what says more, or names a vessel, is a message of its own. */
+function isSlip(waiting: Reading, next: Reading): boolean {
+  const names = Object.keys(next.fields) as FieldName[];
+  const own = names.filter((name) => waiting.fields[name] === undefined);
+  return belongs(waiting, next) && own.length <= 1 && !own.includes('vessel') && !own.includes('vessels');
 }
 
 /** The question once more after a slip in its answer, and after a nod that answers nothing; not after other talk. */

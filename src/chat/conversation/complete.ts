@@ -39,7 +39,7 @@ export function belongs(waiting: Reading, next: Reading): boolean {
  * Whether a message completes the reading that waits: it has fields of its own, contradicts nothing in it and names
  * no other vessel. Otherwise it starts a new one.
  */
-export function completes(waiting: Reading, next: Reading): boolean {
+function completes(waiting: Reading, next: Reading): boolean {
   return Object.keys(next.fields).length > 0 && belongs(waiting, next);
 }
 
@@ -71,6 +71,20 @@ export function asAnswered(waiting: Waiting, next: Reading): Reading {
   if (next.intent !== 'dose' || free_mg_L === undefined || Object.keys(others).length > 0) return next;
   const notes = next.notes.filter(({ id }) => id !== 'free-unlabelled');
   return { ...next, fields: { target: { free_mg_L } }, where: {}, notes };
+}
+
+/** The waiting reading without what its doubt may change: that contradicts nothing. */
+function beyondDoubt({ doubt, reading }: Waiting): Reading {
+  if (doubt === undefined) return reading;
+  const kept = Object.entries(reading.fields).filter(
+    ([name]) => !doubt.settledBy.includes(name as FieldName),
+  );
+  return { ...reading, fields: Object.fromEntries(kept) };
+}
+
+/** Whether a message is the answer that is waited for, or a part of it. */
+export function answers(waiting: Waiting, next: Reading): boolean {
+  return completes(beyondDoubt(waiting), next);
 }
 
 /** Whether a message says what was in doubt: one of its fields, and of a volume of several whether it is of each. */

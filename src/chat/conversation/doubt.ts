@@ -1,4 +1,4 @@
-import type { AskedField, FieldName, Reading } from '../reader/understood.ts';
+import type { AskedField, FieldName, Fields, Reading } from '../reader/understood.ts';
 import { hintFor } from './lines/problem-hint.ts';
 import { noteText } from './lines/notes.ts';
 import type { Doubt } from './memory.ts';
@@ -27,18 +27,10 @@ export function doubtOf(reading: Reading): InDoubt | undefined {
   if (reading.intent === 'chat' || reading.intent === 'emergency') return undefined;
   const asked = askedFor(reading);
   if (asked === undefined) return undefined;
-  const dropped: readonly FieldName[] = asked.settledBy.includes('additive')
-    ? [asked.field, 'additive']
-    : [asked.field];
-  const fields = Object.fromEntries(
-    Object.entries(reading.fields).filter(([name]) => !dropped.includes(name as FieldName)),
-  );
+  const { [asked.field]: _inDoubt, ...fields } = reading.fields as Partial<Record<FieldName, unknown>>;
   // A mass that is in doubt was meant as the amount: with it the message asks what it does.
   const intent = asked.field === 'mass_g' && reading.intent === 'dose' ? 'effect' : reading.intent;
-  const marks = dropped.includes('additive')
-    ? { ...reading.marks, unnamedAdditive: true as const }
-    : reading.marks;
-  const kept: Reading = { ...reading, intent, fields, marks, problems: [], asks: [asked.field] };
+  const kept: Reading = { ...reading, intent, fields: fields as Fields, problems: [], asks: [asked.field] };
   return { ...asked, problems: reading.problems, reading: kept };
 }
 
@@ -93,9 +85,9 @@ function ofAmbiguous(reading: Reading, about: string): Asked | undefined {
       if (fields.target !== undefined) return undefined;
       return { field: 'target', settledBy: ['target', 'rate_mg_L'], byBareNumber: false };
     case 'salt':
-      return { field: 'strength_percent', settledBy: ['strength_percent'], byBareNumber: false };
+      return { field: 'strength_percent', settledBy: ['strength_percent'], byBareNumber: true };
     case 'water':
-      return { field: 'strength_percent', settledBy: ['strength_percent', 'additive'], byBareNumber: false };
+      return { field: 'strength_percent', settledBy: ['strength_percent', 'additive'], byBareNumber: true };
     default:
       return undefined;
   }

@@ -6,7 +6,7 @@ import { answerSingle } from './answer-single.ts';
 import { figureAfterTarget, isBareNumber, noSuchButton, numberAskedAbout } from './bare-number.ts';
 import { checkFields } from './check-fields.ts';
 import { choiceByWords } from './choice-by-words.ts';
-import { asAnswered, complete, completes, completeWaiting } from './complete.ts';
+import { answers, asAnswered, complete, completeWaiting } from './complete.ts';
 import { keepManner } from './keep-manner.ts';
 import type { Memory, Waiting } from './memory.ts';
 import type { Handled, IncomingMessage } from './ports.ts';
@@ -110,6 +110,6 @@ function completed(understood: Understood, waiting: Waiting | undefined, setting
   const [only] = understood.readings;
   if (!waiting || !only || only.problems.length > 0) return understood;
   const next: Reading = asAnswered(waiting, withShared(only, understood.shared));
-  if (!completes(waiting.reading, next)) return understood;
+  if (!answers(waiting, next)) return understood;
   return { ...understood, readings: [completeWaiting(waiting, next, settings)], shared: {} };
 }
