@@ -45,7 +45,7 @@ export function answerRound(
   const head = first ? roundHead(additive, shared, mannerOf(first.reading, decimalMark, settings)) : [];
   const foot = roundFoot(said, cautioned, decimalMark, settings);
   const replies = chunks(said, VESSELS_A_MESSAGE).map((chunk, at): Reply => {
-    const lines: Line[] = [...head, ...chunk.flatMap(({ outcome }) => outcome.inRound)];
+    const lines: Line[] = [...head, ...chunk.flatMap(({ outcome }) => warningsLast(outcome.inRound))];
     return {
       language: settings.language,
       lines: at === 0 ? [...lines, ...foot] : lines,
@@ -59,6 +59,12 @@ export function answerRound(
     understood,
     answers: said.map(({ outcome }) => outcome.answer),
   };
+}
+
+/** What a warning is about stands above it. */
+function warningsLast(lines: readonly Line[]): Line[] {
+  const isWarning = ({ key }: Line): boolean => key.startsWith('warning-');
+  return [...lines.filter((one) => !isWarning(one)), ...lines.filter(isWarning)];
 }
 
 /** The one additive that all doses of a round take, named once above them; undefined where there are several. */

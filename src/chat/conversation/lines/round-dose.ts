@@ -67,7 +67,9 @@ function readBack(own: Reading, manner: Manner): Part[] {
       if (fact.key === 'fact-ph') return part('fact-figure', { figure: fact.values['ph'] ?? '' });
       if (fact.key === 'fact-free' && own.fields.ph !== undefined)
         return part('fact-figure', { figure: fact.values['free'] ?? '' });
-      return fact;
+      // A row has room for the volume as it was written alone.
+      const volume = fact.values['volume']?.replace(/\s\(.*\)$/, '');
+      return volume === undefined ? fact : { ...fact, values: { ...fact.values, volume } };
     })
     .concat(bindingParts(own.fields, manner));
 }
