@@ -444,11 +444,11 @@ caution-never-lean-in = Never lean into a tank.
 caution-gloves-goggles = Gloves, goggles.
 caution-no-acid-no-chlorine = Never with acid or chlorine cleaners.
 caution-asthma = Not for asthmatics.
-caution-crush-first = Crush, then dissolve in a little wine or water.
-caution-dissolve-first = Dissolve in a little wine or water first.
+caution-crush-first = Crush, dissolve in a little wine or water.
+caution-dissolve-first = Dissolve first in a little wine or water.
 caution-foams-with-carbon-dioxide = Wine full of CO2 foams over.
 caution-mix-and-measure-again = Mix, measure after a day.
-caution-label-and-rules-first = Label, local rules and a qualified person come first.
+caution-label-and-rules-first = The label, local rules, a qualified person first.
 cautions-of = ⚠ { additive }: { $list }
 cautions-short = ⚠ Cautions as before: button Safety.
 
@@ -560,7 +560,12 @@ round-amount =
 round-of =
     { $additive ->
         [none] {""}
-       *[other] {" "}{ additive }
+       *[other] { round-percent } { additive }
+    }
+round-percent =
+    { $strength ->
+        [none] {""}
+       *[other] {" "}of { $strength } %
     }
 round-all =
     { $all ->

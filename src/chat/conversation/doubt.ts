@@ -88,7 +88,11 @@ function ofAmbiguous(reading: Reading, about: string): Asked | undefined {
       return { field: 'strength_percent', settledBy: ['strength_percent'], byBareNumber: true };
     case 'water':
       return { field: 'strength_percent', settledBy: ['strength_percent', 'additive'], byBareNumber: true };
-    default:
+    case 'thousands':
+    case 'percent':
+    case 'SO2-percent':
+    case 'degree':
+    case 'other':
       return undefined;
   }
 }

@@ -208,10 +208,10 @@ export interface SentenceValues {
   'refused-ammonium-must': never;
   'round-again': never;
   'round-all': 'all';
-  'round-amount': 'additive' | 'all' | 'amount' | 'red' | 'redAmount' | 'unit';
+  'round-amount': 'additive' | 'all' | 'amount' | 'red' | 'redAmount' | 'strength' | 'unit';
   'round-choice': 'ph' | 'vessel';
-  'round-dose': 'additive' | 'all' | 'amount' | 'list' | 'red' | 'redAmount' | 'unit' | 'vessel';
-  'round-dose-bare': 'additive' | 'all' | 'amount' | 'red' | 'redAmount' | 'unit' | 'vessel';
+  'round-dose': 'additive' | 'all' | 'amount' | 'list' | 'red' | 'redAmount' | 'strength' | 'unit' | 'vessel';
+  'round-dose-bare': 'additive' | 'all' | 'amount' | 'red' | 'redAmount' | 'strength' | 'unit' | 'vessel';
   'round-effect': never;
   'round-for-all': 'list';
   'round-head': 'additive' | 'kind' | 'size';
@@ -222,7 +222,8 @@ export interface SentenceValues {
   'round-not-understood': 'about';
   'round-nothing': 'list' | 'vessel';
   'round-nothing-bare': 'vessel';
-  'round-of': 'additive';
+  'round-of': 'additive' | 'strength';
+  'round-percent': 'strength';
   'round-red': never;
   'round-rest': 'list' | 'strength';
   'round-stock': 'list' | 'strength';

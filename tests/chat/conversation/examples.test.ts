@@ -107,7 +107,10 @@ describe('every example that a reply suggests works when it is sent as it stands
     for (const [example, { understood, answers }] of sent) {
       const [reading] = understood?.readings ?? [];
       expect([example, reading?.problems]).toEqual([example, []]);
-      const isUsed = answers?.[0] != null || reading?.intent === 'added' || (reading?.asks.length ?? 9) < 3;
+      const isUsed =
+        (answers?.[0] ?? undefined) !== undefined ||
+        reading?.intent === 'added' ||
+        (reading?.asks.length ?? 9) < 3;
       expect([example, isUsed, reading?.intent !== 'chat']).toEqual([example, true, true]);
     }
   });

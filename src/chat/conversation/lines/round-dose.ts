@@ -1,4 +1,4 @@
-import type { AdditiveId } from '../../../core/additives/additive-id.ts';
+import type { AdditiveAtHand } from '../../../core/additives/additive-id.ts';
 import type { DoseAnswer } from '../../../core/dose/answer.ts';
 import type { Fields, Reading } from '../../reader/understood.ts';
 import { numberText } from '../../replies/number-text.ts';
@@ -16,7 +16,7 @@ export function roundDoseLine(
   vessel: string,
   own: Reading,
   answer: DoseAnswer,
-  additive: AdditiveId | undefined,
+  additive: AdditiveAtHand | undefined,
   manner: Manner,
 ): Line[] {
   const { measure, stock, per_vessel: each } = answer;
@@ -24,11 +24,13 @@ export function roundDoseLine(
   const asStock = shown === undefined ? (each?.stock ?? stock) : undefined;
   const amount = shown ?? asStock?.measure;
   if (amount === undefined) return [];
+  const strength = asStock?.strength_percent ?? additive?.strength_percent;
   const values = {
     vessel,
     amount: measureText(amount, manner.mark),
     unit: amount.unit === 'tablets' ? 'tablets' : 'other',
-    additive: asStock?.additive ?? additive ?? 'none',
+    additive: asStock?.additive ?? additive?.id ?? 'none',
+    strength: strength === undefined ? 'none' : numberText(strength, 2, manner.mark),
     all: each && measure && shown ? measureText(measure, manner.mark) : 'none',
     ...redOf(answer, manner),
   };
