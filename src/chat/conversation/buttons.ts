@@ -2,7 +2,7 @@ import { ADDITIVES } from '../../core/additives/additives.ts';
 import type { DoseChoice } from '../../core/dose/answer.ts';
 import type { AskedField, Fields } from '../reader/understood.ts';
 import { numberText, type DecimalMark } from '../replies/number-text.ts';
-import type { Button, Line } from '../replies/reply.ts';
+import type { Button } from '../replies/reply.ts';
 import type { SentenceKey } from '../replies/sentence-keys.ts';
 import { perLitre, type Manner } from './manner.ts';
 import { letterAt } from './waiting.ts';
@@ -64,7 +64,8 @@ export function choiceButtons(
 ): Button[] {
   const ways = choices.flatMap((choice, place) => {
     if (choice.over_limit) return [];
-    const label = choice.target === undefined ? ('button-choice-leave' as const) : ('button-choice-to' as const);
+    const label =
+      choice.target === undefined ? ('button-choice-leave' as const) : ('button-choice-to' as const);
     return [{ key: `c:${number}:${place}`, label, values: { free: perLitre(choice.free_mg_L, manner) } }];
   });
   const others = [...(mayBeRed ? (['red'] as const) : []), 'm' as const].map((does) => ({

@@ -5,20 +5,21 @@ export type DecimalMark = '.' | ',';
 const THIN_SPACE = '\u202f';
 
 /**
- * A number as text: rounded to at most `decimals` places (0 to 10), trailing zeros dropped, thousands parted by
- * a narrow space. Throws a RangeError for what is no finite number, so that none ever reaches a person.
+ * A number as text: rounded to at most `decimals` places (0 to 10), trailing zeros dropped but for
+ * the `least` places, thousands parted by a narrow space. Throws a RangeError for what is no finite number, so that none ever reaches a person.
  *
  * @example
  * ```ts
  * numberText(5488.85, 0, '.') // => "5\u202f489"
  * numberText(0.356, 2, ',') // => "0,36"
  * numberText(0.8, 2, '.') // => "0.8"
+ * numberText(4, 3, '.', 1) // => "4.0"
  * ```
  */
-export function numberText(value: number, decimals: number, mark: DecimalMark): string {
+export function numberText(value: number, decimals: number, mark: DecimalMark, least = 0): string {
   if (!Number.isFinite(value)) throw new RangeError(`Cannot write a number as it is not finite: ${value}`);
   const [whole = '', broken = ''] = Math.abs(value).toFixed(decimals).split('.');
-  const kept = broken.replace(/0+$/, '');
+  const kept = broken.slice(0, least) + broken.slice(least).replace(/0+$/, '');
   const grouped = whole.replace(/(?<=\d)(?=(?:\d{3})+$)/g, THIN_SPACE);
   const sign = value < 0 && (kept !== '' || /[1-9]/.test(whole)) ? '-' : '';
   return `${sign}${grouped}${kept === '' ? '' : mark + kept}`;

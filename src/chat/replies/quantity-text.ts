@@ -26,17 +26,26 @@ export function molecularText(mg_L: number, mark: DecimalMark): string {
   return numberText(mg_L, 2, mark);
 }
 
+/** Decimals that the instrument shows at least: kilograms and litres to 0.01, under 10 g or mL to 0.1. */
+function stepDecimals({ value, unit }: Measure): number {
+  if (unit === 'kg' || unit === 'L') return 2;
+  return value < 10 ? 1 : 0;
+}
+
 /**
- * What a scale or a cylinder shows, with its unit; tablets (half ones too) without, as their word is the locale's.
+ * What a scale or a cylinder shows, with the digits of its step and its unit; tablets (half ones too) without, as their word is the locale's.
  *
  * @example
  * ```ts
  * measureText({ value: 256, unit: 'g' }, '.') // => "256 g"
+ * measureText({ value: 4, unit: 'g' }, '.') // => "4.0 g"
+ * measureText({ value: 1.2, unit: 'L' }, '.') // => "1.20 L"
  * measureText({ value: 2.5, unit: 'tablets' }, '.') // => "2½"
  * ```
  */
 export function measureText(measure: Measure, mark: DecimalMark): string {
-  if (measure.unit !== 'tablets') return `${numberText(measure.value, 3, mark)} ${measure.unit}`;
+  if (measure.unit !== 'tablets')
+    return `${numberText(measure.value, 3, mark, stepDecimals(measure))} ${measure.unit}`;
   const whole = Math.floor(measure.value);
   if (measure.value - whole < 0.25) return numberText(whole, 0, mark);
   return `${whole === 0 ? '' : numberText(whole, 0, mark)}½`;

@@ -11,6 +11,7 @@ export const ROOMS = [
   'warning',
   'caution',
 ] as const;
+/** The place of a line in a reply. */
 export type Room = (typeof ROOMS)[number];
 
 /** One line of a reply as data: a sentence's key in `locales/`, and its values as finished text. */

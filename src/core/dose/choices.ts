@@ -5,11 +5,12 @@ import type { DoseChoice } from './answer.ts';
 import { portionOf } from './portion.ts';
 import type { DoseRequest } from './request.ts';
 import { standingAfter, type RoomToLimit } from './room-to-limit.ts';
-import { FREE_NEED_HIGH_mg_L } from './thresholds.ts';
+import { CHOICES_APART_mg_L, FREE_NEED_HIGH_mg_L } from './thresholds.ts';
 
 /**
  * The ways out where the need is high and nobody stated the target: leave it, go to 60 mg/L free, the full target.
- * One whose free or predicted total SO2 passes the limit on file carries no amount.
+ * 60 falls away where it is less than 5 mg/L from one of the others. One whose free or predicted total SO2 passes the
+ * limit on file carries no amount.
  *
  * @param request with pH and free SO2 (mg/L, not negative)
  * @param full the target in full, mg/L
@@ -48,6 +49,9 @@ export function choicesFor(
       ...(over ? { over_limit: true } : portionOf(request, dose_mg_L, room.ceiling_mg_L)?.shown),
     };
   };
-  const to60 = free_mg_L < FREE_NEED_HIGH_mg_L ? [choice({ free_mg_L: FREE_NEED_HIGH_mg_L })] : [];
-  return [choice(), ...to60, choice(full)];
+  const [leave, to60, all] = [choice(), choice({ free_mg_L: FREE_NEED_HIGH_mg_L }), choice(full)];
+  const isApart = ({ free_mg_L: other }: DoseChoice): boolean =>
+    Math.abs(other - FREE_NEED_HIGH_mg_L) >= CHOICES_APART_mg_L;
+  const between = free_mg_L < FREE_NEED_HIGH_mg_L && isApart(leave) && isApart(all);
+  return between ? [leave, to60, all] : [leave, all];
 }

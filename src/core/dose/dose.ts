@@ -15,8 +15,15 @@ import { redAmountWarnings } from './red-amount.ts';
 import type { DoseRequest } from './request.ts';
 import { roomToLimit } from './room-to-limit.ts';
 import { isRoundingCoarse } from './rounding.ts';
-import { additionWarnings, factWarnings, smellWarnings, stageWarnings } from './shared-warnings.ts';
+import {
+  additionWarnings,
+  factWarnings,
+  smellWarnings,
+  stageNotOverWarnings,
+  stageWarnings,
+} from './shared-warnings.ts';
 import { FREE_NEED_HIGH_mg_L } from './thresholds.ts';
+import { smallnessWarnings } from './smallness-warnings.ts';
 import { inOrder } from './warnings.ts';
 
 /**
@@ -59,6 +66,7 @@ export function dose(request: DoseRequest): DoseAnswer {
   if (target === undefined) {
     warnings.push(...stageWarnings(request.stage), ...smellWarnings(now));
   } else {
+    warnings.push(...stageNotOverWarnings(request.stage));
     if (!request.stageStated) warnings.push({ code: 'stage-assumed', values: { stage: request.stage } });
     warnings.push(...redAmountWarnings(asked, pK, room), ...aimWarnings(asked, aim, portioned));
     warnings.push(
@@ -100,9 +108,9 @@ function withoutTarget(request: DoseRequest): DoseRequest {
 const freeOf = ({ free_mg_L }: DoseRequest): { free_mg_L?: number } =>
   free_mg_L === undefined ? {} : { free_mg_L };
 
-/** A high need that nobody stated is a choice and not a dose. */
+/** A high need that nobody stated is a choice and not a dose; it is told in whole mg/L, and so it is compared. */
 const isHigh = (request: DoseRequest, aim: Aim): boolean =>
-  !request.targetStated && (aim.target_free_mg_L ?? 0) > FREE_NEED_HIGH_mg_L;
+  !request.targetStated && Math.round(aim.target_free_mg_L ?? 0) > FREE_NEED_HIGH_mg_L;
 const isChoice = (request: DoseRequest, aim: Aim): boolean =>
   isHigh(request, aim) && request.ph !== undefined && (aim.add_mg_L ?? 0) > 0;
 
@@ -127,6 +135,7 @@ function aimWarnings(request: DoseRequest, aim: Aim, portioned: Portioned | unde
       values: target_free_mg_L === undefined ? {} : { target_free_mg_L, ...freeOf(request) },
     });
   }
+  warnings.push(...smallnessWarnings(add_mg_L ?? 0, request.additive, portioned?.shown));
   if (target_free_mg_L !== undefined && isHigh(request, aim) && add_mg_L !== 0) {
     warnings.push({ code: 'free-needed-high', values: { target_free_mg_L } });
   }

@@ -8,7 +8,7 @@ import { givenBy } from './given-amount.ts';
 import { landing } from './landing.ts';
 import type { EffectRequest } from './request.ts';
 import { roomToLimit } from './room-to-limit.ts';
-import { additionWarnings, factWarnings, stageWarnings } from './shared-warnings.ts';
+import { additionWarnings, factWarnings, stageNotOverWarnings } from './shared-warnings.ts';
 import { inOrder } from './warnings.ts';
 
 /**
@@ -36,7 +36,7 @@ export function effect(request: EffectRequest): EffectAnswer {
   const { pK } = dissociation;
   const after = adds_mg_L === undefined ? {} : landing(request, adds_mg_L, adds_mg_L, pK);
   const lands = 'molecular_after_mg_L' in after;
-  const warnings: Warning[] = [...factWarnings(request), ...stageWarnings(request.stage)];
+  const warnings: Warning[] = [...factWarnings(request), ...stageNotOverWarnings(request.stage)];
   if (request.toStopFermentation) {
     warnings.push({
       code: 'does-not-stop-fermentation',

@@ -4,6 +4,7 @@ import { ADDITIVES } from '../additives/additives.ts';
 import type { AdditiveAmount } from '../additives/so2-in.ts';
 import type { AsStock, Measure, PerVessel } from './answer.ts';
 import { measureOf, type Instrument, type Rounded } from './rounding.ts';
+import { RISE_NEGLIGIBLE_mg_L } from './thresholds.ts';
 
 /** Strength of the stock that small amounts are also given in, grams of powder in 100 mL (common practice). */
 export const STOCK_PERCENT = 10;
@@ -61,7 +62,7 @@ function stockFor(additive: AdditiveAtHand, SO2_g: number, dose_mg_L: number): A
 
 /**
  * A dose for a volume as an amount of the additive, and as the instrument shows it. Under 5 g of powder the same
- * as a 10 % stock; tablets down to the half with the rest as stock, and no `measure` below half a tablet.
+ * as a 10 % stock; tablets down to the half with the rest as stock where it is 0.5 mg/L or more, and no `measure` below half a tablet.
  *
  * @param portion dose in mg/L SO2, volume in L
  * @returns `undefined` when the additive's strength or size is missing
@@ -89,7 +90,8 @@ export function measured(portion: Portion): Measured | undefined {
     return { ...whole, measure, rounding_mg_L, ...(stock === undefined ? {} : { stock }) };
   }
   const rest_g = SO2_g * (1 - measure.value / size);
-  const stock = rest_g > SO2_g * 1e-9 ? stockFor(additive, rest_g, (dose_mg_L * rest_g) / SO2_g) : undefined;
+  const rest_mg_L = dose_mg_L * (1 - measure.value / size);
+  const stock = rest_mg_L < RISE_NEGLIGIBLE_mg_L ? undefined : stockFor(additive, rest_g, rest_mg_L);
   const rest = stock === undefined ? {} : { stock };
   if (measure.value === 0) return { ...whole, ...rest };
   return { ...whole, measure, rounding_mg_L, measure_gives_mg_L: dose_mg_L + rounding_mg_L, ...rest };

@@ -42,8 +42,11 @@ export function redAmountWarnings(request: DoseRequest, pK: number, room: RoomTo
   const aim = aimAt({ molecular_mg_L: RED_TARGET_MOLECULAR_mg_L }, request, pK);
   const values: Record<string, number | string> = { style: 'red', ...aim };
   const dose_mg_L = aim.dose_mg_L ?? 0;
-  if (dose_mg_L > 0 && standingAfter(room, dose_mg_L) === 'over') values['over_limit'] = 'yes';
-  else if (dose_mg_L > 0) {
+  const { limit } = room.found;
+  if (limit !== undefined && dose_mg_L > 0 && standingAfter(room, dose_mg_L) === 'over') {
+    Object.assign(values, { over_limit: 'yes', limit_mg_L: limit.limit_mg_L });
+  }
+  if (dose_mg_L > 0) {
     const shown = portionOf(request, dose_mg_L, room.ceiling_mg_L)?.shown;
     const { SO2_g, mass_g, additive_volume_mL, tablets, measure, stock, per_vessel } = shown ?? {};
     for (const [key, value] of Object.entries({ SO2_g, mass_g, additive_volume_mL, tablets })) {

@@ -1,6 +1,8 @@
 import { PH_USUAL } from '../bounds.ts';
-import type { AdditiveAtHand } from '../additives/additive-id.ts';
-import { STAGES_WITHOUT_TARGET, type Stage } from '../wine.ts';
+import type { AdditiveAtHand, AdditiveId } from '../additives/additive-id.ts';
+import { ADDITIVES } from '../additives/additives.ts';
+import type { SourceKey } from '../sources.ts';
+import { STAGES_WITHOUT_TARGET, type Product, type Stage } from '../wine.ts';
 import { FREE_LOW_mg_L } from '../binding/free-expected.ts';
 import type { Warning } from './answer.ts';
 import { standingAfter, type RoomToLimit } from './room-to-limit.ts';
@@ -22,16 +24,37 @@ export function stageWarnings(stage: Stage): readonly Warning[] {
 }
 
 /**
- * What the pH (usual from 2.8 to 4.2) and the additive call for.
+ * That an addition goes into wine that still ferments, or whose malolactic fermentation is still to come, with the
+ * published ceilings. Must and base wine take their additions as a matter of course.
+ *
+ * @example
+ * ```ts
+ * stageNotOverWarnings('fermenting')[0]?.values['stage'] // => 'fermenting'
+ * stageNotOverWarnings('must') // => []
+ * ```
+ */
+export function stageNotOverWarnings(stage: Stage): readonly Warning[] {
+  if (stage !== 'malolactic' && stage !== 'fermenting') return [];
+  return [{ code: 'stage-not-over', values: { stage, ...MALOLACTIC_CEILINGS } }];
+}
+
+/**
+ * What the pH (usual from 2.8 to 4.2) and the additive call for: ammonium bisulfite is for grapes and must only, and
+ * sodium metabisulfite stands in no sheet for wine.
+ *
+ * Source: OIV II.1.12 and Oeno 7/2003 (read).
  *
  * @example
  * ```ts
  * factWarnings({ ph: 4.3 }) // => [{ code: 'ph-unusual', values: { ph: 4.3 } }]
+ * factWarnings({ additive: { id: 'ammonium-bisulfite-solution' }, stage: 'must' }) // => []
  * ```
  */
 export function factWarnings(facts: {
   readonly ph?: number;
   readonly additive?: AdditiveAtHand;
+  readonly stage?: Stage;
+  readonly product?: Product;
 }): readonly Warning[] {
   const warnings: Warning[] = [];
   const { ph, additive } = facts;
@@ -39,7 +62,22 @@ export function factWarnings(facts: {
     warnings.push({ code: 'ph-unusual', values: { ph } });
   }
   if (additive?.id === 'sulfur-dioxide-gas') warnings.push({ code: 'gas-needs-training', values: {} });
+  if (additive !== undefined && !isPermitted(additive.id, facts)) {
+    warnings.push({
+      code: 'additive-not-permitted',
+      values: { additive: additive.id, rule: 'oiv-ii-1.12' satisfies SourceKey },
+    });
+  }
   return warnings;
+}
+
+function isPermitted(
+  id: AdditiveId,
+  { stage, product }: { readonly stage?: Stage; readonly product?: Product },
+): boolean {
+  if (id === 'ammonium-bisulfite-solution') return stage === 'must';
+  // The code speaks of wine alone.
+  return product !== undefined || ADDITIVES[id].contains !== 'sodium';
 }
 
 /** What an addition makes of a wine; mg/L. */

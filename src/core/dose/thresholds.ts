@@ -4,6 +4,15 @@ export const FREE_NEED_HIGH_mg_L = 60;
 /** Molecular SO2 in mg/L above which it is smelt (Understanding Wine Chemistry 2016, table 17.1; read). */
 export const MOLECULAR_SMELT_mg_L = 2;
 
+/** mg/L of SO2 below which a rise is smaller than any reading shows, so that nothing is worth adding (own threshold). */
+export const RISE_NEGLIGIBLE_mg_L = 0.5;
+
+/** Grams of SO2 below which the gas cannot be measured out (own threshold). */
+export const GAS_LEAST_g = 5;
+
+/** mg/L of free SO2 by which two ways out of a choice must differ to be two (own threshold). */
+export const CHOICES_APART_mg_L = 5;
+
 /** SO2 in mg/L above which one addition is worth a second look at the volume's unit (own threshold). */
 export const ADDITION_LARGE_mg_L = 100;
 

@@ -12,6 +12,7 @@ export const CONCENTRATION_UNITS = [
   'lb/galUK',
   'oz/galUS',
 ] as const;
+/** The canonical id of a concentration unit. */
 export type ConcentrationUnitId = (typeof CONCENTRATION_UNITS)[number];
 
 /**

@@ -2,6 +2,7 @@ import { assertBetween } from '../bounds.ts';
 
 /** Mass units by their canonical ids, those of mathjs; `tonne` is 1000 kg (mathjs's `ton` is the short ton). */
 export const MASS_UNITS = ['g', 'kg', 'mg', 'lb', 'oz', 'tonne'] as const;
+/** The canonical id of a mass unit. */
 export type MassUnitId = (typeof MASS_UNITS)[number];
 
 /**

@@ -10,6 +10,7 @@ export const SHOWN_UNITS = {
   'mg/L': 1,
   ...LITRES_IN,
 } as const;
+/** A unit that a working may show; `""` for a pure number. */
 export type ShownUnit = keyof typeof SHOWN_UNITS;
 
 /** A volume as the person wrote it: the working then shows it so. `value` in `unit`. */

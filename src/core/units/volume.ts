@@ -2,6 +2,7 @@ import { assertBetween } from '../bounds.ts';
 
 /** Volume units by their canonical ids: those of mathjs, and the two gallons. */
 export const VOLUME_UNITS = ['L', 'hL', 'mL', 'cL', 'dL', 'm3', 'galUS', 'galUK'] as const;
+/** The canonical id of a volume unit. */
 export type VolumeUnitId = (typeof VOLUME_UNITS)[number];
 
 /**

@@ -1,6 +1,8 @@
 import { describe, expect, test } from 'vitest';
+import { ADDITIVES } from '../../../src/core/additives/additives.ts';
+import { cautionLines } from '../../../src/chat/conversation/lines/cautions.ts';
 import { MOST_ROWS, PHONE_COLUMNS, rowsOf } from '../../../src/chat/replies/fold.ts';
-import { startTalk, textOf } from './talk.ts';
+import { say, startTalk, textOf } from './talk.ts';
 
 /** Messages of every kind; figures made up. */
 const MESSAGES = [
@@ -47,6 +49,22 @@ test.each([
   talk.write(message);
   expect(rowsOf(textOf(talk.write(message)), PHONE_COLUMNS)).toBeLessThanOrEqual(16);
 });
+
+test.each(Object.values(ADDITIVES).map(({ id }) => id))(
+  'the cautions of %s in full are sentences on at most six rows',
+  (id) => {
+    for (const [use, tablet_salt_g] of [
+      ['wine', undefined],
+      ['wine', 0.44],
+      ['water', undefined],
+    ] as const) {
+      const lines = cautionLines({ id, ...(tablet_salt_g && { tablet_salt_g }) }, true, use);
+      const { text } = say({ language: 'en', lines, buttons: [] });
+      expect(rowsOf(text, PHONE_COLUMNS)).toBeLessThanOrEqual(6);
+      expect(text).toMatch(/^⚠ ([A-Z][^.;]*\. ?)+$/);
+    }
+  },
+);
 
 test('help explains itself with three examples in twelve rows', () => {
   const help = textOf(startTalk().write('?'));

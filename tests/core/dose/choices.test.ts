@@ -20,11 +20,23 @@ describe('a high need that nobody stated is a choice', () => {
     expect(answer.measure).toEqual({ value: 691, unit: 'g' }); // the full figures are kept
   });
 
-  test('60 mg/L itself is not high, a hair more is', () => {
-    // 60 = 0.6 × (10^x + 1), so x = log10(99)
-    const ph = 1.81 + Math.log10(99);
-    expect(doseOf({ ...RED, ph: ph - 1e-9 }).choices).toBeUndefined();
-    expect(doseOf({ ...RED, ph: ph + 1e-6 }).choices).toHaveLength(3);
+  // free = 0.6 × (10^x + 1), so x = log10(free ÷ 0.6 − 1)
+  const needing = (free_mg_L: number) => doseOf({ ...RED, ph: 1.81 + Math.log10(free_mg_L / 0.6 - 1) });
+
+  test.each([
+    [60, undefined],
+    [60.4, undefined], // told as 60
+    [60.6, 2], // 60 and 61 are one way out
+    [64.9, 2],
+    [65.1, 3],
+  ])('a need of %d mg/L is told in whole mg/L, and ways out are 5 apart', (free_mg_L, ways) => {
+    expect(needing(free_mg_L).choices?.length).toBe(ways);
+    expect(codesOf(needing(free_mg_L)).includes('free-needed-high')).toBe(ways !== undefined);
+  });
+
+  test('60 falls away where the wine is all but there', () => {
+    expect(doseOf({ ...RED, ph: 4.1, free_mg_L: 56 }).choices).toHaveLength(2);
+    expect(doseOf({ ...RED, ph: 4.1, free_mg_L: 55 }).choices).toHaveLength(3);
   });
 
   test('with 60 mg/L free already the middle way falls away', () => {

@@ -37,7 +37,7 @@ describe('effect() of a rate', () => {
   test('1 g of powder in 10 L adds 58 mg/L, and does not stop a fermentation', () => {
     const answer = effectOf({ rate_mg_L: 100, stage: 'fermenting', toStopFermentation: true });
     expect(Math.round(answer.adds_mg_L ?? 0)).toBe(58);
-    expect(codesOf(answer).slice(0, 2)).toEqual(['does-not-stop-fermentation', 'no-dose-at-this-stage']);
+    expect(codesOf(answer).slice(0, 2)).toEqual(['does-not-stop-fermentation', 'stage-not-over']);
   });
   test('with a volume it gives the mass of the additive', () => {
     expect(effectOf({ rate_mg_L: 100, volume_L: 500 })).toMatchObject({
@@ -61,7 +61,7 @@ describe('effect() warns', () => {
     [{ mass_g: 100, volume_L: 2000, total_mg_L: 130, style: 'red' }, 'total-over-limit'],
     [{ mass_g: 100, volume_L: 2000, total_mg_L: 110, style: 'red' }, 'total-near-limit'],
     [{ mass_g: 100, volume_L: 2000, free_mg_L: 4 }, 'free-low-may-bind-all'],
-    [{ mass_g: 100, volume_L: 2000, stage: 'malolactic' }, 'no-dose-at-this-stage'],
+    [{ mass_g: 100, volume_L: 2000, stage: 'malolactic' }, 'stage-not-over'],
     [{ mass_g: 100, volume_L: 2000, additive: { id: 'sulfur-dioxide-gas' } }, 'gas-needs-training'],
     [{ mass_g: 100, volume_L: 2000, ph: 4.4, free_mg_L: 20 }, 'ph-unusual'],
     [{ mass_g: 100, volume_L: 2000, ph: 3.4, free_mg_L: 20, basis: 'oiv' }, 'basis-fallback'],

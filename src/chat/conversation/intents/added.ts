@@ -11,7 +11,7 @@ import { vesselText } from '../lines/vessel.ts';
 import { workingLines } from '../lines/working.ts';
 import { perLitre } from '../manner.ts';
 import type { Outcome, Turn } from '../outcome.ts';
-import { toAddedRequest } from '../to-requests.ts';
+import { additiveOf, toAddedRequest } from '../to-requests.ts';
 import { missing } from './missing.ts';
 
 /** An addition that was made: what follows from it, and that nothing is kept yet. */
@@ -37,7 +37,7 @@ export function answerAdded(reading: Reading, turn: Turn): Outcome {
 
 function firstOfAdded(reading: Reading, answer: AddedAnswer, { manner }: Turn): Line {
   const vessel = vesselText(reading);
-  const additive = reading.fields.additive ?? reading.assumed.additive ?? 'potassium-metabisulfite';
+  const additive = additiveOf(reading) ?? { id: 'potassium-metabisulfite' };
   const stated = statedAmount(reading.fields, additive, manner.mark);
   const worked = statedAmount(answer, additive, manner.mark);
   const gave = answer.added_mg_L === undefined ? 'none' : perLitre(answer.added_mg_L, manner);

@@ -2,7 +2,6 @@ import { dose } from '../../../core/dose/dose.ts';
 import type { DoseAnswer, WarningCode } from '../../../core/dose/answer.ts';
 import type { DoseRequest } from '../../../core/dose/request.ts';
 import type { Reading } from '../../reader/understood.ts';
-import type { Line } from '../../replies/reply.ts';
 import { choiceButtons, doseButtons } from '../buttons.ts';
 import { assumedLines } from '../lines/assumed.ts';
 import { cautionLines } from '../lines/cautions.ts';
@@ -11,17 +10,20 @@ import { conditionLines, redFigures } from '../lines/condition.ts';
 import { expectationLines } from '../lines/expectation.ts';
 import { factLines } from '../lines/facts.ts';
 import { firstOfDose, hasAmount } from '../lines/first-dose.ts';
+import { basisLines } from '../lines/basis.ts';
+import { bottledLines } from '../lines/bottled.ts';
 import { line } from '../lines/line.ts';
 import { numberText } from '../../replies/number-text.ts';
-import { nothingLines, saidNothingNeeded } from '../lines/nothing-needed.ts';
+import { nothingLines, saidNothingNeeded, saidNothingToWeigh } from '../lines/nothing-needed.ts';
 import { roundDoseLine, roundNothingLine } from '../lines/round-dose.ts';
 import { vesselText } from '../lines/vessel.ts';
-import { warningLines } from '../lines/warnings.ts';
+import { underLines, warningLines } from '../lines/warnings.ts';
 import { workingLines } from '../lines/working.ts';
 import type { Outcome, Turn } from '../outcome.ts';
 import { additiveOf, toDoseRequest } from '../to-requests.ts';
 import { fermentStop } from './ferment-stop.ts';
 import { noDose } from './no-dose.ts';
+import { notPermitted } from './not-permitted.ts';
 import { partialDose } from './partial-dose.ts';
 
 /** Each way out of a choice says for itself how much it takes and whether it may be taken. */
@@ -38,11 +40,11 @@ export function answerDose(reading: Reading, turn: Turn): Outcome {
   const request = toDoseRequest(reading, turn.settings.basis);
   const answer = dose(request);
   if (reading.notes.some(({ id }) => id === 'ferment-stop')) return fermentStop(reading, null, turn);
-  const refused = noDose(reading, answer, turn);
+  const refused = noDose(reading, answer, turn) ?? notPermitted(reading, answer, turn);
   if (refused) return refused;
   if (reading.asks.length > 0) return partialDose(reading, request, answer, turn);
+  if (saidNothingToWeigh(answer)) return nothing(reading, answer, turn);
   if (answer.choices) return choice(reading, answer, turn);
-  if (saidNothingNeeded(answer)) return nothing(reading, answer, turn);
   return wholeDose(reading, request, answer, turn);
 }
 
@@ -60,20 +62,25 @@ function wholeDose(reading: Reading, request: DoseRequest, answer: DoseAnswer, t
         vesselText(reading),
         turn.round?.own ?? reading,
         answer,
-        turn.round?.isOneAdditive ? undefined : additive.id,
+        turn.round?.isOneAdditive ? undefined : additive,
         manner,
       ),
+      ...underLines(answer.warnings, manner),
       ...warningLines(answer.warnings, manner, 'first', ['free-low-may-bind-all']),
     ],
     lines: [
-      ...first,
+      ...bottledLines(reading),
+      ...first.slice(0, 1),
+      ...underLines(answer.warnings, manner),
+      ...first.slice(1),
       ...condition,
       ...expectationLines(reading, answer, otherArithmetic(request), manner),
       ...factLines(reading, manner),
       ...assumedLines(reading, manner),
+      ...basisLines(reading, answer, manner),
       ...workingLines(answer.steps, manner),
       ...warningLines(answer.warnings, manner, 'warning', lowIsSaid(reading)),
-      ...cautionLines(additive.id, inFull),
+      ...cautionLines(additive, inFull),
     ],
     buttons: doseButtons(number, {
       stageAssumed: reading.assumed.stage !== undefined,
@@ -100,32 +107,27 @@ function otherArithmetic(request: DoseRequest): DoseAnswer | undefined {
 
 function choice(reading: Reading, answer: DoseAnswer, turn: Turn): Outcome {
   const { manner, number } = turn;
-  const additive = additiveOf(reading)?.id;
+  const additive = additiveOf(reading);
   const vessel = vesselText(reading);
-  const inFull = additive !== undefined && !turn.cautioned.has(additive);
+  const inFull = additive !== undefined && !turn.cautioned.has(additive.id);
   const ph = numberText(reading.fields.ph ?? 0, 2, manner.mark);
   return {
     answer,
     inRound: [line('first', 'round-choice', { vessel, ph })],
     lines: [
+      ...bottledLines(reading),
       ...choiceLines(reading, vessel, answer, additive, manner),
-      ...choiceConditions(reading, answer),
+      ...underLines(answer.warnings, manner).filter(({ key }) => key !== 'warning-total-over-limit'),
+      ...(reading.assumed.stage === undefined ? [] : [line('condition', 'condition-stage')]),
       ...factLines(reading, manner),
       ...assumedLines(reading, manner),
+      ...basisLines(reading, answer, manner),
       ...warningLines(answer.warnings, manner, 'warning', SAID_BY_THE_CHOICE),
       ...(additive === undefined ? [] : cautionLines(additive, inFull)),
     ],
-    buttons: choiceButtons(number, answer.choices ?? [], manner),
-    ...(inFull && { cautioned: additive }),
+    buttons: choiceButtons(number, answer.choices ?? [], redFigures(answer) !== undefined, manner),
+    ...(inFull && { cautioned: additive.id }),
   };
-}
-
-/** For a red the full target is another one; that too would be a choice, so no amount is told for it here. */
-function choiceConditions(reading: Reading, answer: DoseAnswer): Line[] {
-  return [
-    ...(reading.assumed.stage === undefined ? [] : [line('condition', 'condition-stage')]),
-    ...(redFigures(answer) === undefined ? [] : [line('condition', 'condition-red-choice')]),
-  ];
 }
 
 function nothing(reading: Reading, answer: DoseAnswer, turn: Turn): Outcome {
@@ -133,13 +135,15 @@ function nothing(reading: Reading, answer: DoseAnswer, turn: Turn): Outcome {
   const first = nothingLines(reading, answer, manner);
   return {
     answer,
-    inRound: roundNothingLine(vesselText(reading), turn.round?.own ?? reading, manner),
+    inRound: saidNothingNeeded(answer)
+      ? roundNothingLine(vesselText(reading), turn.round?.own ?? reading, manner)
+      : first.slice(0, 1),
     lines: [
       ...first,
       ...conditionLines(reading, answer, manner),
       ...factLines(reading, manner),
       ...assumedLines(reading, manner),
-      ...warningLines(answer.warnings, manner),
+      ...warningLines(answer.warnings, manner, 'warning', ['rounding-coarse']),
     ],
     buttons: doseButtons(number, {
       stageAssumed: reading.assumed.stage !== undefined,

@@ -2,14 +2,16 @@ import { effect } from '../../../core/dose/effect.ts';
 import type { EffectAnswer } from '../../../core/dose/answer.ts';
 import type { Reading } from '../../reader/understood.ts';
 import { buttonsFor } from '../buttons.ts';
-import { statedAmount } from '../lines/amount-text.ts';
+import { numberOf, statedAmount } from '../lines/amount-text.ts';
 import { assumedLines } from '../lines/assumed.ts';
 import { cautionLines } from '../lines/cautions.ts';
 import { factLines } from '../lines/facts.ts';
-import { landingLine } from '../lines/landing.ts';
+import { basisLines } from '../lines/basis.ts';
+import { bottledLines } from '../lines/bottled.ts';
+import { landingLine, riseLine } from '../lines/landing.ts';
 import { line } from '../lines/line.ts';
 import { vesselText } from '../lines/vessel.ts';
-import { warningLines } from '../lines/warnings.ts';
+import { underLines, warningLines } from '../lines/warnings.ts';
 import { workingLines } from '../lines/working.ts';
 import { perLitre, type Manner } from '../manner.ts';
 import { shortened } from '../lines/problems.ts';
@@ -32,22 +34,38 @@ export function answerEffect(reading: Reading, turn: Turn): Outcome {
   const inFull = !turn.cautioned.has(additive.id);
   const first = firstOfEffect(reading, answer, turn);
   const landing = landingLine(reading, answer, manner);
+  const heavy = [
+    ...bottledLines(reading),
+    ...underLines(answer.warnings, manner),
+    ...warningLines(answer.warnings, manner, 'first').filter(({ key }) => key === 'warning-addition-large'),
+  ];
   return {
     answer,
-    inRound: first.slice(0, 1),
+    inRound: [...heavy, ...first.slice(0, 1)],
     lines: [
+      ...heavy,
       ...first,
       ...(reading.assumed.stage === undefined ? [] : [line('condition', 'condition-stage')]),
-      ...(landing ? [landing] : []),
+      ...(landing ? [landing] : expectedRise(reading, answer.adds_mg_L, manner)),
       ...factLines(reading, manner),
       ...assumedLines(reading, manner),
+      ...basisLines(reading, answer, manner),
       ...workingLines(answer.steps, manner),
-      ...warningLines(answer.warnings, manner, 'warning', landing ? ['free-low-may-bind-all'] : []),
-      ...cautionLines(additive.id, inFull),
+      ...warningLines(answer.warnings, manner, 'warning', [
+        'addition-large',
+        ...(landing ? (['free-low-may-bind-all'] as const) : []),
+      ]),
+      ...cautionLines(additive, inFull),
     ],
     buttons: buttonsFor(turn.number, [...(inFull ? [] : (['s'] as const)), 'w', 'm']),
     ...(inFull && { cautioned: additive.id }),
   };
+}
+
+/** Without readings: how far free SO2 may be expected to rise, where the wine does not ferment. */
+function expectedRise({ fields }: Reading, adds_mg_L: number, manner: Manner): Line[] {
+  if (fields.stage === 'must') return [line('effect', 'effect-must')];
+  return fields.stage === 'fermenting' ? [] : [riseLine(adds_mg_L, manner)];
 }
 
 /** The rate as the person wrote it, where the whole of it is known; else per hectolitre. */
@@ -71,6 +89,7 @@ function firstOfEffect(reading: Reading, answer: EffectAnswer, { manner }: Turn)
     const amount = massText(answer.mass_g, manner.mark);
     return [first, line('first', 'adds-rate-mass', { volume, amount })];
   }
-  const amount = statedAmount(fields, additive, manner.mark);
-  return amount === undefined ? [] : [{ ...line('first', 'adds', values), list: [amount] }];
+  const amount = statedAmount(fields, additiveOf(reading) ?? { id: additive }, manner.mark);
+  if (amount === undefined) return [];
+  return [{ ...line('first', 'adds', { ...values, number: numberOf(amount) }), list: [amount] }];
 }

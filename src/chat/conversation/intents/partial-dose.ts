@@ -4,10 +4,12 @@ import type { Reading } from '../../reader/understood.ts';
 import type { Line } from '../../replies/reply.ts';
 import { assumedLines } from '../lines/assumed.ts';
 import { factLines } from '../lines/facts.ts';
+import { basisLines } from '../lines/basis.ts';
+import { bottledLines } from '../lines/bottled.ts';
 import { line } from '../lines/line.ts';
 import { knownSoFar } from '../lines/known-so-far.ts';
 import { vesselText } from '../lines/vessel.ts';
-import { warningLines } from '../lines/warnings.ts';
+import { underLines, warningLines } from '../lines/warnings.ts';
 import type { Outcome, Turn } from '../outcome.ts';
 import { asking } from './asking.ts';
 
@@ -16,6 +18,7 @@ export function partialDose(reading: Reading, request: DoseRequest, answer: Dose
   const { manner } = turn;
   const known = knownSoFar(reading, request, answer, manner);
   const says = known.length > 0;
+  const under = underLines(answer.warnings, manner);
   const condition: Line[] =
     says && reading.assumed.stage !== undefined ? [line('condition', 'condition-stage')] : [];
   const { question, buttons, waits } = asking(reading, turn, says ? 'question' : 'first');
@@ -25,11 +28,12 @@ export function partialDose(reading: Reading, request: DoseRequest, answer: Dose
       line('first', 'round-missing', { vessel: vesselText(reading), field: reading.asks[0] ?? 'none' }),
     ],
     lines: [
-      ...(says ? known : question),
+      ...(says ? [...bottledLines(reading), ...known.slice(0, 1), ...under, ...known.slice(1)] : question),
       ...condition,
       ...(says ? question : []),
       ...factLines(reading, manner),
       ...assumedLines(reading, manner),
+      ...(says ? basisLines(reading, answer, manner) : []),
       ...warningLines(answer.warnings, manner, 'warning', ['no-dose-at-this-stage']),
     ],
     buttons,

@@ -40,10 +40,9 @@ export function answerSolution(reading: Reading, turn: Turn): Outcome {
       ...factLines(reading, manner),
       ...assumedLines(reading, manner),
       ...workingLines(answer.steps, manner),
-      ...cautionLines(id, inFull),
+      ...cautionLines(request.additive, inFull, 'water'),
     ],
     buttons: buttonsFor(turn.number, inFull ? ['w'] : ['w', 's']),
-    ...(inFull && { cautioned: id }),
   };
 }
 

@@ -1,7 +1,6 @@
 import { ADDITIVES } from '../../../core/additives/additives.ts';
-import type { AdditiveId } from '../../../core/additives/additive-id.ts';
+import type { AdditiveAtHand } from '../../../core/additives/additive-id.ts';
 import type { Amount } from '../../../core/dose/answer.ts';
-import type { Fields } from '../../reader/understood.ts';
 import { numberText, type DecimalMark } from '../../replies/number-text.ts';
 import { massText } from '../../replies/quantity-text.ts';
 import type { Line } from '../../replies/reply.ts';
@@ -13,27 +12,46 @@ export function additiveVolumeText(additive_volume_mL: number, mark: DecimalMark
   return `${numberText(additive_volume_mL, additive_volume_mL >= 9.95 ? 0 : 1, mark)} mL`;
 }
 
-function sizeOf(fields: Fields | Partial<Amount>, mark: DecimalMark): string {
-  const size = 'tablet_salt_g' in fields ? fields.tablet_salt_g : undefined;
-  return size === undefined ? 'none' : numberText(size, 2, mark);
-}
-
 /** The amount that a person stated, as it goes into a list or a line; undefined where none is. */
 export function statedAmount(
-  fields: Fields | Partial<Amount>,
-  additive: AdditiveId,
+  amount: Partial<Amount>,
+  additive: AdditiveAtHand,
   mark: DecimalMark,
 ): Omit<Line, 'room'> | undefined {
-  if (fields.tablets !== undefined)
-    return part('amount-tablets', {
-      amount: numberText(fields.tablets, 2, mark),
-      additive,
-      size: sizeOf(fields, mark),
-    });
-  if (fields.additive_volume_mL !== undefined)
-    return part('amount', { amount: additiveVolumeText(fields.additive_volume_mL, mark), additive });
-  if (fields.mass_g === undefined) return undefined;
+  const { mass_g, additive_volume_mL } = amount;
+  const { id, strength_percent } = additive;
+  const tablets = amount.tablets ?? effervescentIn(mass_g, additive);
+  if (tablets !== undefined) return tabletsOf(tablets, additive, mark);
+  if (additive_volume_mL !== undefined) {
+    const text = additiveVolumeText(additive_volume_mL, mark);
+    if (strength_percent === undefined) return part('amount', { amount: text, additive: id });
+    const strength = numberText(strength_percent, 2, mark);
+    return part('amount-solution', { amount: text, additive: id, strength });
+  }
+  if (mass_g === undefined) return undefined;
   // The mass of effervescent tablets is told as the SO2 they give.
-  const key = ADDITIVES[additive].kind === 'tablet' ? 'amount-SO2' : 'amount';
-  return part(key, { amount: massText(fields.mass_g, mark), additive });
+  const key = ADDITIVES[id].kind === 'tablet' ? 'amount-SO2' : 'amount';
+  return part(key, { amount: massText(mass_g, mark), additive: id });
+}
+
+/** How many effervescent tablets give so many grams of SO2, where it is a whole number of them or of halves. */
+function effervescentIn(mass_g: number | undefined, { tablet_SO2_g }: AdditiveAtHand): number | undefined {
+  if (mass_g === undefined || tablet_SO2_g === undefined) return undefined;
+  const tablets = mass_g / tablet_SO2_g;
+  return Math.abs(tablets * 2 - Math.round(tablets * 2)) < 1e-9 ? tablets : undefined;
+}
+
+function tabletsOf(tablets: number, additive: AdditiveAtHand, mark: DecimalMark): Omit<Line, 'room'> {
+  const size = additive.tablet_salt_g ?? additive.tablet_SO2_g;
+  return part('amount-tablets', {
+    amount: numberText(tablets, 2, mark),
+    unit: tablets <= 1 ? 'tablet' : 'tablets',
+    additive: additive.id,
+    size: size === undefined ? 'none' : numberText(size, 2, mark),
+  });
+}
+
+/** Whether a stated amount is one thing or many, as the verb after it must agree. */
+export function numberOf(amount: Omit<Line, 'room'> | undefined): 'one' | 'many' {
+  return amount?.values['unit'] === 'tablets' ? 'many' : 'one';
 }

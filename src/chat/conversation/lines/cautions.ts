@@ -1,14 +1,22 @@
-import type { AdditiveId } from '../../../core/additives/additive-id.ts';
+import type { AdditiveAtHand } from '../../../core/additives/additive-id.ts';
 import { cautionsOf } from '../../../core/additives/cautions.ts';
 import type { Line } from '../../replies/reply.ts';
 import { line, listLine, part } from './line.ts';
 
-/** The cautions of an additive: in full the first time in a day, then one line with the button `Safety`. */
-export function cautionLines(additive: AdditiveId, inFull: boolean): Line[] {
+/**
+ * The cautions of an additive: in full the first time in a day, then one line with the button `Safety`.
+ *
+ * @param use whether it goes into wine, or into water for a stock
+ */
+export function cautionLines(
+  { id, tablet_salt_g }: Pick<AdditiveAtHand, 'id' | 'tablet_salt_g'>,
+  inFull: boolean,
+  use: 'wine' | 'water' = 'wine',
+): Line[] {
   if (!inFull) return [line('caution', 'cautions-short')];
   return listLine(
     'caution',
     'cautions',
-    cautionsOf(additive).map((id) => part(`caution-${id}`)),
+    cautionsOf(id, use, tablet_salt_g !== undefined).map((caution) => part(`caution-${caution}`)),
   );
 }

@@ -1,19 +1,27 @@
-import type { AdditiveId } from '../../../core/additives/additive-id.ts';
+import type { AdditiveAtHand } from '../../../core/additives/additive-id.ts';
 import type { DoseAnswer, DoseChoice } from '../../../core/dose/answer.ts';
+import { limitFor } from '../../../core/limits/limit-for.ts';
 import type { Reading } from '../../reader/understood.ts';
 import { numberText } from '../../replies/number-text.ts';
-import { concentrationText, measureText, molecularText } from '../../replies/quantity-text.ts';
+import { concentrationText, molecularText } from '../../replies/quantity-text.ts';
 import type { Line } from '../../replies/reply.ts';
 import { perLitre, type Manner } from '../manner.ts';
-import { shownChoices } from '../shown-choices.ts';
+import { redFigures, redValues } from './condition.ts';
 import { line } from './line.ts';
+import { measuredAmount } from './measured.ts';
+
+/** The limit of a wine as a text; `none` where we know of none. */
+export function limitText({ fields }: Reading, manner: Manner): string {
+  const { limit } = limitFor(fields);
+  return limit === undefined ? 'none' : perLitre(limit.limit_mg_L, manner);
+}
 
 /** The first lines where a usual target would need so much free SO2 that a person has to choose. */
 export function choiceLines(
   reading: Reading,
   vessel: string,
   answer: DoseAnswer,
-  additive: AdditiveId | undefined,
+  additive: AdditiveAtHand | undefined,
   manner: Manner,
 ): Line[] {
   const { choices = [], target_free_mg_L, target_molecular_mg_L } = answer;
@@ -23,16 +31,24 @@ export function choiceLines(
     target: molecularText(target_molecular_mg_L ?? 0, manner.mark),
     free: perLitre(target_free_mg_L ?? 0, manner),
   });
-  const ways = shownChoices(choices).map(({ choice }, at) =>
-    optionLine(choice, String(at + 1), additive, manner),
-  );
-  return [head, ...ways, line('first', 'ways-out')];
+  const ways = choices.map((choice, at) => optionLine(choice, String(at + 1), reading, additive, manner));
+  return [head, ...redLine(reading, answer, manner), ...ways, line('first', 'ways-out')];
+}
+
+/** For a red the full target is another one, with a figure and an amount of its own. */
+function redLine(reading: Reading, answer: DoseAnswer, manner: Manner): Line[] {
+  const red = redFigures(answer);
+  const free = red?.['target_free_mg_L'];
+  if (red === undefined || typeof free !== 'number') return [];
+  const values = { ...redValues(red, manner), free: concentrationText(free, manner.mark) };
+  return [line('first', 'choice-red', { ...values, limit: limitText(reading, manner) })];
 }
 
 function optionLine(
   choice: DoseChoice,
   mark: string,
-  additive: AdditiveId | undefined,
+  reading: Reading,
+  additive: AdditiveAtHand | undefined,
   manner: Manner,
 ): Line {
   const values = {
@@ -41,9 +57,14 @@ function optionLine(
     molecular: molecularText(choice.molecular_mg_L, manner.mark),
   };
   if (choice.target === undefined) return line('first', 'choice-leave', values);
-  if (choice.measure !== undefined && additive !== undefined) {
-    const amount = measureText(choice.measure, manner.mark);
-    return line('first', 'choice-to', { ...values, amount, additive });
-  }
-  return line('first', 'choice-no-amount', values);
+  const amount = additive && measuredAmount(choice, additive, manner);
+  if (amount) return line('first', 'choice-to', { ...values, ...amount, total: totalFor(choice, reading) });
+  return line('first', 'choice-no-amount', { ...values, limit: limitText(reading, manner) });
+}
+
+/** An unknown total matters where free SO2 alone would be more than half of the limit. */
+function totalFor({ free_mg_L }: DoseChoice, { fields }: Reading): 'known' | 'unknown' {
+  const { limit } = limitFor(fields);
+  if (fields.total_mg_L !== undefined || limit === undefined) return 'known';
+  return free_mg_L > limit.limit_mg_L / 2 ? 'unknown' : 'known';
 }

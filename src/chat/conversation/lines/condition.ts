@@ -1,9 +1,10 @@
 import type { DoseAnswer, Measure, Warning } from '../../../core/dose/answer.ts';
 import type { Reading } from '../../reader/understood.ts';
-import { concentrationText, measureText } from '../../replies/quantity-text.ts';
+import { concentrationText } from '../../replies/quantity-text.ts';
 import type { Line } from '../../replies/reply.ts';
-import type { Manner } from '../manner.ts';
+import { perLitre, type Manner } from '../manner.ts';
 import { line } from './line.ts';
+import { bareAmount } from './measured.ts';
 
 /** Core's figures for the same wine as a red, where its colour is unknown and makes another dose. */
 export function redFigures(answer: Pick<DoseAnswer, 'warnings'>): Warning['values'] | undefined {
@@ -13,38 +14,36 @@ export function redFigures(answer: Pick<DoseAnswer, 'warnings'>): Warning['value
 
 /** What the first line depends on: that the fermentations are over, and the amount for a red. */
 export function conditionLines(reading: Reading, answer: DoseAnswer, manner: Manner): Line[] {
-  const stage = stageLines(reading);
+  const stage = reading.assumed.stage === undefined ? [] : [line('condition', 'condition-stage')];
   const red = redFigures(answer);
   return red === undefined ? stage : [...stage, line('condition', 'condition-red', redValues(red, manner))];
 }
 
-/** A stated aim is reckoned at every stage; where sulfite does harm, it is said beside it. */
-function stageLines({ assumed, fields }: Reading): Line[] {
-  if (assumed.stage !== undefined) return [line('condition', 'condition-stage')];
-  if (fields.stage === 'malolactic') return [line('condition', 'no-dose-why')];
-  return fields.stage === 'fermenting' ? [line('condition', 'no-dose-why-fermenting')] : [];
+/**
+ * The amount for a red as the sentences take it: `kind` is `none` where nothing is needed, `over` where it passes the
+ * limit too; `amount` is then `none`, or its text.
+ */
+export function redValues(values: Warning['values'], manner: Manner): Line['values'] {
+  const limit = concentrationText(numberIn(values, 'limit_mg_L'), manner.mark);
+  const more = { kind: values['over_limit'] === undefined ? 'some' : 'over', limit };
+  const each = measureNamed(values, 'each_measure');
+  const measure = each ?? measureNamed(values, 'measure');
+  const amount = bareAmount(measure, each ? 'several' : 'one', manner);
+  if (amount) return { ...more, ...amount };
+  const dose = numberIn(values, 'dose_mg_L');
+  const rise = { unit: 'other', count: 'one', amount: `+ ${perLitre(dose, manner)}` };
+  return dose === 0 ? { ...more, ...rise, kind: 'none', amount: 'none' } : { ...more, ...rise };
 }
 
-/** The amount for a red as the sentences take it: `none` where nothing is needed, `over` where the limit forbids it. */
-export function redValues(values: Warning['values'], manner: Manner): Line['values'] {
-  if (values['over_limit'] !== undefined) return { amount: 'over' };
-  const each = values['each_measure_value'] === undefined ? '' : 'each_';
-  const value = values[`${each}measure_value`];
-  const unit = values[`${each}measure_unit`];
-  if (typeof value === 'number' && typeof unit === 'string') {
-    const measure = { value, unit: unit as Measure['unit'] };
-    const tablets = unit === 'tablets' ? 'tablets' : 'other';
-    return {
-      amount: measureText(measure, manner.mark),
-      unit: tablets,
-      each: each === '' ? 'one' : 'several',
-    };
-  }
-  const dose = values['dose_mg_L'];
-  if (typeof dose !== 'number' || dose === 0) return { amount: 'none' };
-  return {
-    amount: `+ ${concentrationText(dose, manner.mark)} ${manner.unit}`,
-    unit: 'other',
-    each: 'one',
-  };
+function measureNamed(values: Warning['values'], name: string): Measure | undefined {
+  const value = values[`${name}_value`];
+  const unit = values[`${name}_unit`];
+  return typeof value === 'number' && typeof unit === 'string'
+    ? { value, unit: unit as Measure['unit'] }
+    : undefined;
+}
+
+function numberIn(values: Warning['values'], name: string): number {
+  const value = values[name];
+  return typeof value === 'number' ? value : 0;
 }

@@ -2,11 +2,15 @@ import { bindingCovered } from '../../../core/binding/allowance.ts';
 import type { DoseAnswer } from '../../../core/dose/answer.ts';
 import type { Reading } from '../../reader/understood.ts';
 import { numberText, shareText } from '../../replies/number-text.ts';
-import { concentrationText, measureText } from '../../replies/quantity-text.ts';
+import { concentrationText } from '../../replies/quantity-text.ts';
 import type { Line } from '../../replies/reply.ts';
-import type { Manner } from '../manner.ts';
-import { landingLine } from './landing.ts';
+import { perLitre, type Manner } from '../manner.ts';
+import { landingLine, rangeText } from './landing.ts';
 import { line } from './line.ts';
+import { bareAmount, measureIn } from './measured.ts';
+
+/** An allowance of half as much again covers a binding of a third (plain arithmetic). */
+const THIRD_COVERED_percent = 50;
 
 /** What a dose does and what to expect of it, with the arithmetic of a stated allowance or share. */
 export function expectationLines(
@@ -20,6 +24,7 @@ export function expectationLines(
     return [...allowance(percent, answer, manner), ...asOther(reading, other, manner)];
   if (share !== undefined) return [...shareLost(share, answer, manner), ...asOther(reading, other, manner)];
   if (reading.fields.stage === 'must') return [line('effect', 'effect-must')];
+  if (reading.fields.stage === 'fermenting') return [];
   const landing = landingLine(reading, answer, manner);
   if (landing) return [landing];
   if (answer.dose_mg_L === undefined) return [];
@@ -33,8 +38,7 @@ function reached(answer: DoseAnswer, manner: Manner): Record<string, string> | u
   return {
     after: concentrationText(after, manner.mark),
     unit: manner.unit,
-    low: concentrationText(expected[0], manner.mark),
-    high: concentrationText(expected[1], manner.mark),
+    range: rangeText(expected, manner),
   };
 }
 
@@ -43,6 +47,7 @@ function allowance(percent: number, answer: DoseAnswer, manner: Manner): Line[] 
     percent: numberText(percent, 1, manner.mark),
     factor: numberText(1 + percent / 100, 3, manner.mark),
     covers: numberText(bindingCovered(percent), 0, manner.mark),
+    third: percent < THIRD_COVERED_percent ? 'more' : 'covered',
   };
   const where = reached(answer, manner);
   return [line('effect', where ? 'effect-allowance' : 'effect-allowance-bare', { ...values, ...where })];
@@ -58,19 +63,18 @@ function shareLost(share: number, answer: DoseAnswer, manner: Manner): Line[] {
 function asOther(reading: Reading, other: DoseAnswer | undefined, manner: Manner): Line[] {
   const { binding_allowance_percent: percent, binding_share: share } = reading.fields;
   if (other?.dose_mg_L === undefined) return [];
-  const amount = other.measure
-    ? measureText(other.measure, manner.mark)
-    : `${concentrationText(other.dose_mg_L, manner.mark)} ${manner.unit}`;
+  const bare = bareAmount(measureIn(other), other.per_vessel ? 'several' : 'one', manner);
+  const amount = bare ?? { amount: perLitre(other.dose_mg_L, manner), unit: 'other', count: 'one' };
   const said = (value: number, decimals: number): string => numberText(value, decimals, manner.mark);
   if (percent !== undefined)
     return [
       line('effect', 'other-as-share', {
         percent: said(percent, 1),
         divisor: said(1 - percent / 100, 3),
-        amount,
+        ...amount,
       }),
     ];
   if (share === undefined) return [];
-  const values = { percent: said(share * 100, 0), factor: said(1 + share, 2), amount };
+  const values = { percent: said(share * 100, 0), factor: said(1 + share, 2), ...amount };
   return [line('effect', 'other-as-allowance', values)];
 }

@@ -1,3 +1,5 @@
+import type { AdditiveId } from '../../../core/additives/additive-id.ts';
+import { readStrength } from '../../../core/additives/read-strength.ts';
 import type { Fields, Reading } from '../../reader/understood.ts';
 import type { Line } from '../../replies/reply.ts';
 import { numberText } from '../../replies/number-text.ts';
@@ -50,7 +52,15 @@ function wordsOf(fields: Fields, manner: Manner): Part[] {
       part('fact-strength', {
         additive: fields.additive,
         strength: numberText(fields.strength_percent, 2, manner.mark),
+        kind: strengthKind(fields.additive, fields.strength_percent),
       }),
     );
   return words;
+}
+
+/** How a strength was read; a bisulfite's has a note of its own among the assumptions. */
+function strengthKind(additive: AdditiveId, strength_percent: number): string {
+  if (additive.includes('bisulfite-solution') && !additive.includes('meta')) return 'noted';
+  const read = readStrength(additive, strength_percent, false, true);
+  return 'kind' in read ? read.kind : 'noted';
 }

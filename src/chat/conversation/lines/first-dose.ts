@@ -1,23 +1,19 @@
 import type { AdditiveAtHand } from '../../../core/additives/additive-id.ts';
 import { ADDITIVES } from '../../../core/additives/additives.ts';
-import type { DoseAnswer, Measure } from '../../../core/dose/answer.ts';
+import type { AsStock, DoseAnswer, Measure } from '../../../core/dose/answer.ts';
 import type { Line } from '../../replies/reply.ts';
 import { concentrationText, measureText } from '../../replies/quantity-text.ts';
 import { numberText } from '../../replies/number-text.ts';
 import type { SentenceKey } from '../../replies/sentence-keys.ts';
 import type { Manner } from '../manner.ts';
-import { line } from './line.ts';
+import { line, listLine, part } from './line.ts';
+import { measuredAmount, sumOf, unitWord } from './measured.ts';
 
 /** The sentence that tells how to measure an additive. */
 function sentenceFor(additive: AdditiveAtHand, measure: Measure): SentenceKey {
-  if (measure.unit === 'tablets')
-    return additive.tablet_salt_g === undefined ? 'dose-tablets' : 'dose-tablets-salt';
+  if (measure.unit === 'tablets') return 'dose-tablets';
   const { kind } = ADDITIVES[additive.id];
   return kind === 'gas' ? 'dose-gas' : kind === 'solution' ? 'dose-measure' : 'dose-weigh';
-}
-
-function size(additive: AdditiveAtHand, { mark }: Manner): string {
-  return numberText(additive.tablet_salt_g ?? additive.tablet_SO2_g ?? 0, 2, mark);
 }
 
 /** Whether an answer carries an amount that can be weighed, measured or counted. */
@@ -35,31 +31,17 @@ export function firstOfDose(
   const { mark } = manner;
   const each = answer.per_vessel;
   const { measure, stock, measure_gives_mg_L: gives } = each ?? answer;
-  const values = { vessel, count: each ? 'several' : 'one' };
+  const amount = measuredAmount(answer, additive, manner);
   const lines: Line[] = [];
-  if (measure)
-    lines.push(
-      line('first', sentenceFor(additive, measure), {
-        ...values,
-        amount: measureText(measure, mark),
-        additive: additive.id,
-        size: size(additive, manner),
-      }),
-    );
+  if (measure && amount) lines.push(line('first', sentenceFor(additive, measure), { vessel, ...amount }));
   if (stock) {
-    const key =
-      measure === undefined
-        ? 'dose-only-stock'
-        : measure.unit === 'tablets'
-          ? 'dose-rest-as-stock'
-          : 'dose-stock';
-    const strength = numberText(stock.strength_percent, 1, mark);
     lines.push(
-      line('first', key, {
-        ...values,
+      line('first', stockSentence(measure), {
+        vessel,
         amount: measureText(stock.measure, mark),
-        strength,
+        strength: numberText(stock.strength_percent, 1, mark),
         additive: stock.additive,
+        count: each ? 'several' : 'one',
       }),
     );
   }
@@ -73,12 +55,38 @@ export function firstOfDose(
       }),
     );
   }
-  if (each && answer.measure) {
-    const amount = measureText(answer.measure, mark);
-    const tablets = answer.measure.unit === 'tablets' ? 'tablets' : 'other';
-    lines.push(
-      line('first', 'dose-in-all', { count: numberText(each.count, 0, mark), amount, unit: tablets }),
-    );
-  }
-  return lines;
+  return each ? [...lines, ...inAll(each.count, measure, stock, manner)] : lines;
+}
+
+function stockSentence(measure: Measure | undefined): SentenceKey {
+  if (measure === undefined) return 'dose-only-stock';
+  return measure.unit === 'tablets' ? 'dose-rest-as-stock' : 'dose-stock';
+}
+
+/** What is really used for all vessels: so often what is measured for one, and so often the rest of its tablets. */
+function inAll(
+  count: number,
+  measure: Measure | undefined,
+  stock: AsStock | undefined,
+  { mark }: Manner,
+): Line[] {
+  const whole = measure === undefined ? undefined : sumOf(measure, count);
+  const isNeeded = measure === undefined || measure.unit === 'tablets';
+  const parts = [
+    ...(whole
+      ? [part('bare-amount', { amount: measureText(whole, mark), unit: unitWord(whole), count: 'one' })]
+      : []),
+    ...(stock && isNeeded
+      ? [
+          part('in-all-stock', {
+            amount: measureText(sumOf(stock.measure, count), mark),
+            strength: numberText(stock.strength_percent, 1, mark),
+          }),
+        ]
+      : []),
+  ];
+  return listLine('first', 'dose-in-all', parts).map((one) => ({
+    ...one,
+    values: { count: numberText(count, 0, mark) },
+  }));
 }

@@ -4,10 +4,10 @@ import type { DoseRequest } from '../../../core/dose/request.ts';
 import { litresFrom } from '../../../core/units/volume.ts';
 import type { Reading } from '../../reader/understood.ts';
 import { numberText } from '../../replies/number-text.ts';
-import { measureText } from '../../replies/quantity-text.ts';
 import type { Line } from '../../replies/reply.ts';
 import { molecularPerLitre, perLitre, type Manner } from '../manner.ts';
 import { line } from './line.ts';
+import { measuredAmount } from './measured.ts';
 import { vesselText } from './vessel.ts';
 
 /** The volume a rate is told for: a hectolitre, or a thousand gallons. */
@@ -44,8 +44,8 @@ function rateLine(request: DoseRequest, dose_mg_L: number, vessel: string, manne
   const values = { vessel, dose: perLitre(dose_mg_L, manner) };
   if (request.additive === undefined || forOne.measure === undefined || forOne.measure.unit === 'tablets')
     return line('first', 'dose-rate-bare', values);
-  const amount = measureText(forOne.measure, manner.mark);
-  return line('first', 'dose-rate', { ...values, amount, additive: request.additive.id, per: per.text });
+  const amount = measuredAmount(forOne, request.additive, manner);
+  return line('first', 'dose-rate', { ...values, ...amount, per: per.text });
 }
 
 function nowLine(reading: Reading, answer: DoseAnswer, vessel: string, manner: Manner): Line | undefined {

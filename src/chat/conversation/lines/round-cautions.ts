@@ -10,7 +10,7 @@ export function roundCautions(additives: readonly AdditiveId[], cautioned: Reado
   const [first, another] = fresh;
   const before: Line[] = fresh.length < additives.length ? [line('caution', 'cautions-short')] : [];
   if (first === undefined) return before;
-  if (another === undefined) return [...cautionLines(first, true), ...before];
+  if (another === undefined) return [...cautionLines({ id: first }, true), ...before];
   const isCommon = (caution: string): boolean =>
     fresh.every((id) => cautionsOf(id).some((one) => one === caution));
   const common = cautionsOf(first).filter(isCommon);

@@ -13,6 +13,8 @@ const SAID_ELSEWHERE = [
   'stage-assumed',
   'style-unknown',
   'no-addition-needed',
+  'addition-negligible',
+  'gas-too-little',
   'gas-needs-training',
   'allowance-covers-less',
   'does-not-stop-fermentation',
@@ -27,6 +29,21 @@ function isTold(warning: Warning): warning is Told {
 
 /** No limit is spoken of unless it is passed or near. */
 const ONLY_BEHIND_MORE: readonly WarningCode[] = ['no-limit-on-file', 'limit-unconfirmed'];
+
+/** What may forbid the addition: it stands right under the answer, and is never folded away. */
+const RIGHT_UNDER = [
+  'stage-not-over',
+  'additive-not-permitted',
+  'total-over-limit',
+] as const satisfies readonly WarningCode[];
+
+/** The warnings that stand right under the first line, with who is to be asked. */
+export function underLines(warnings: readonly Warning[], manner: Manner): Line[] {
+  return warnings
+    .filter(isTold)
+    .filter(({ code }) => RIGHT_UNDER.some((one) => one === code))
+    .map((warning) => warningLine(warning, manner, 'first'));
+}
 
 /** Whether free SO2 will be above half the limit, so that an unknown total is worth a word. */
 function totalMatters({ code, values }: Warning): boolean {
@@ -44,7 +61,7 @@ export function warningLines(
 ): Line[] {
   return warnings
     .filter(isTold)
-    .filter(({ code }) => ![...ONLY_BEHIND_MORE, ...besides].includes(code))
+    .filter(({ code }) => ![...ONLY_BEHIND_MORE, ...RIGHT_UNDER, ...besides].includes(code))
     .filter(totalMatters)
     .filter(({ values }) => values['measure_gives_mg_L'] === undefined) // the tablets' own line says so
     .slice(0, MOST)
@@ -63,10 +80,15 @@ function warningLine({ code, values }: Told, manner: Manner, room: Line['room'])
       limit_mg_L: textOf('limit_mg_L', values['limit_mg_L'] ?? '', manner),
       unit: manner.unit,
     });
-  const tellsChange = code === 'basis-fallback' && values['need_change_mg_L'] !== undefined;
+  const change = values['need_change_mg_L'];
+  const tellsChange = code === 'basis-fallback' && typeof change === 'number';
   return line(room, tellsChange ? 'warning-basis-fallback-change' : `warning-${code}`, {
     unit: manner.unit,
     ...Object.fromEntries<string>(texts),
+    ...(tellsChange && {
+      change: concentrationText(Math.abs(change), manner.mark),
+      direction: change > 0 ? 'more' : 'less',
+    }),
   });
 }
 

@@ -13,10 +13,9 @@ const GIVE_WAY: readonly Step['name'][] = ['dissociation', 'molecular-now', 'mol
 
 /** The three to five lines of the working that lead to the amount. */
 export function workingLines(steps: readonly Step[], manner: Pick<Manner, 'mark' | 'unit'>): Line[] {
-  let shown = steps;
-  for (const name of GIVE_WAY) if (shown.length > 4) shown = shown.filter((step) => step.name !== name);
   // What all vessels take is told as what is measured for each, so often over.
-  if (shown.length > MOST_LINES) shown = shown.filter(({ name }) => name !== 'all-vessels');
+  let shown = steps.filter(({ name }) => name !== 'all-vessels');
+  for (const name of GIVE_WAY) if (shown.length > 4) shown = shown.filter((step) => step.name !== name);
   if (shown.length > MOST_LINES) shown = shown.filter((step) => !isPlainVolume(step));
   return shown.slice(-MOST_LINES).map((step) => line('working', 'working', shortValues(step, manner)));
 }

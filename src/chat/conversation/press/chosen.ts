@@ -3,6 +3,7 @@ import type { Target } from '../../../core/wine.ts';
 import type { Reading } from '../../reader/understood.ts';
 import type { DecimalMark } from '../../replies/number-text.ts';
 import type { Line } from '../../replies/reply.ts';
+import { limitText } from '../lines/choice.ts';
 import { line } from '../lines/line.ts';
 import { vesselText } from '../lines/vessel.ts';
 import { mannerOf, molecularPerLitre } from '../manner.ts';
@@ -24,6 +25,6 @@ export function chosen(
     const molecular = molecularPerLitre(choice.molecular_mg_L, manner);
     return { lines: [line('first', 'choice-left', { vessel, molecular }), line('first', 'ways-out')] };
   }
-  if (choice.over_limit) return { lines: [line('first', 'choice-over', { vessel })] };
+  if (choice.over_limit) return { lines: [line('first', 'choice-over', { vessel, limit: limitText(reading, manner) })] };
   return { target: choice.target };
 }

@@ -55,14 +55,17 @@ function reckonAgain(reading: Reading, settings: Settings): Reckoned {
 /** The whole working of a remembered reading, line by line, with its sources. */
 export function workingOf(reading: Reading, mark: DecimalMark, settings: Settings): Line[] {
   const { steps } = reckonAgain(reading, settings);
-  return [line('first', 'working-head', { vessel: vesselText(reading) }), ...wholeWorking(steps, mannerOf(reading, mark, settings))];
+  return [
+    line('first', 'working-head', { vessel: vesselText(reading) }),
+    ...wholeWorking(steps, mannerOf(reading, mark, settings)),
+  ];
 }
 
 /** The cautions of a reading's additive in full. */
 export function safetyLines(reading: Reading): Line[] {
   const additive = additiveOf(reading);
   if (additive === undefined) return [line('first', 'old-button')];
-  return [line('first', 'safety-head', { additive: additive.id }), ...cautionLines(additive.id, true)];
+  return [line('first', 'safety-head', { additive: additive.id }), ...cautionLines(additive, true, reading.intent === 'solution' ? 'water' : 'wine')];
 }
 
 function buttonsBehind(reading: Reading, warned: readonly Warning[]): (keyof typeof LABELS)[] {
