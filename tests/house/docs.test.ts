@@ -46,6 +46,8 @@ const CORE = 'src/core/planted.ts';
 test.each([
   ['no doc comment', 'src/edge/planted.ts', 'export function f(): void {}'],
   ['no doc comment', 'src/edge/planted.ts', '/* no */ export const X = 1;'],
+  ['no doc comment', 'src/edge/planted.ts', 'export type X = 1;'],
+  ['no doc comment', 'src/edge/planted.ts', 'export interface X {}'],
   ['no doc comment', 'src/edge/planted.ts', '/** of the other */\nconst Y = 2;\nexport class X {}'],
   [
     'no unit',

@@ -1,18 +1,18 @@
 import type { ESTree } from 'vite';
 import type { SourceFile } from './source-file.ts';
 
-/** A function, constant or class that a file exports, with the comment that stands right above it. */
+/** A function, constant, class or type that a file exports, with the comment that stands right above it. */
 export interface Exported {
   readonly file: SourceFile;
   readonly name: string;
-  readonly kind: 'function' | 'constant' | 'class';
+  readonly kind: 'function' | 'constant' | 'class' | 'type';
   readonly start: number;
   /** The text of its doc comment; empty when it has none. */
   readonly doc: string;
   readonly declaration: ESTree.Declaration;
 }
 
-/** What a file exports, in its order: functions, constants and classes, not types. */
+/** What a file exports, in its order: functions, constants, classes and types. */
 export function exportedFrom(file: SourceFile): Exported[] {
   return file.program.body.flatMap((statement): Exported[] => {
     if (statement.type !== 'ExportNamedDeclaration' || !statement.declaration) return [];
@@ -22,6 +22,8 @@ export function exportedFrom(file: SourceFile): Exported[] {
       return [{ ...common, name: declaration.id?.name ?? '', kind: 'function' }];
     if (declaration.type === 'ClassDeclaration')
       return [{ ...common, name: declaration.id?.name ?? '', kind: 'class' }];
+    if (declaration.type === 'TSTypeAliasDeclaration' || declaration.type === 'TSInterfaceDeclaration')
+      return [{ ...common, name: declaration.id.name, kind: 'type' }];
     if (declaration.type !== 'VariableDeclaration') return [];
     return declaration.declarations.map((one) => ({
       ...common,

@@ -10,6 +10,7 @@ export interface Who {
   readonly person: string;
 }
 
+/** What was sent: a text, the key of a button, or something that is not read. */
 export type Content =
   | { readonly kind: 'text'; readonly text: string }
   | { readonly kind: 'press'; readonly key: string }
@@ -32,6 +33,7 @@ export interface IncomingMessage extends Who {
 /** What has to be kept before anything is sent. */
 export type Write = { readonly kind: 'memory'; readonly who: Who; readonly memory: Memory };
 
+/** What core answers to one reading. */
 export type Answer = DoseAnswer | EffectAnswer | AddedAnswer | SolutionAnswer;
 
 /** Handling a message returns its writes and its replies as data; the edge commits, then sends. */

@@ -123,7 +123,7 @@ function placesOf(board: Board): Partial<Record<FieldName, Place>> {
   return places;
 }
 
-/** A weight of fruit named with a cask mark but taken by a vessel word. */
+/** `puncheon 3`: the word names the vessel, and says too that its size is not a barrel's. */
 function noteCask(board: Board): void {
   const named = findingOf(board, 'vessel');
   if (

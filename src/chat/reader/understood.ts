@@ -2,8 +2,10 @@ import type { AdditiveId } from '../../core/additives/additive-id.ts';
 import type { Problem } from '../../core/problem.ts';
 import type { Category, Product, Stage, Style, Target } from '../../core/wine.ts';
 
+/** The languages of the message language, by their ISO 639-1 codes. */
 export type Language = 'en' | 'es' | 'fr' | 'it' | 'de' | 'pt';
 
+/** What a person wants; `titration` and `command` are named by the message language and not read yet. */
 export type Intent =
   'dose' | 'effect' | 'added' | 'reading' | 'solution' | 'titration' | 'command' | 'emergency' | 'chat';
 
@@ -37,6 +39,7 @@ export interface Fields {
   readonly additive_volume_mL?: number;
 }
 
+/** The name of a field, as the message language and `ask` have it. */
 export type FieldName = keyof Fields;
 
 /** What the bot filled in; every one of these stands in the reply. */
@@ -62,6 +65,7 @@ export const ASKED_FIELDS = [
   'tablet_SO2_g',
   'mass_g',
 ] as const;
+/** A field that can be missing. */
 export type AskedField = (typeof ASKED_FIELDS)[number];
 
 /** How something was read, where the reply has to say so. `text` is the person's own words. */

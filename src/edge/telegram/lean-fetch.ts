@@ -7,6 +7,7 @@ export interface LeanFetch {
   close(): void;
 }
 
+/** As much of a request as the Bot API client hands in. */
 export interface LeanRequest {
   readonly method?: string;
   readonly headers?: Record<string, string>;
@@ -15,6 +16,7 @@ export interface LeanRequest {
   readonly signal?: Pick<AbortSignal, 'aborted' | 'addEventListener' | 'removeEventListener'>;
 }
 
+/** As much of a response as the Bot API client looks at. */
 export interface LeanResponse {
   readonly status: number;
   json(): Promise<unknown>;

@@ -36,8 +36,11 @@ const Update = z.looseObject({
 /** The kinds of update that are asked for; the platform keeps the others to itself. */
 export const ALLOWED_UPDATES = ['message', 'edited_message', 'callback_query'] as const;
 
+/** What is used of a message. */
 export type TelegramMessage = z.infer<typeof Message>;
+/** What is used of a person. */
 export type TelegramUser = z.infer<typeof User>;
+/** What is used of a chat. */
 export type TelegramChat = z.infer<typeof Chat>;
 /** What is used of an update; without any of its parts it is of a kind that is passed over. */
 export type TelegramUpdate = z.infer<typeof Update>;

@@ -68,7 +68,7 @@ const isRange = (board: Board, i: number): boolean =>
 const isFlow = (board: Board, i: number): boolean =>
   (isMark(board, i, '/') || isCue(board, i, 'per')) && hasTag(board, i + 1, 'unit:none-of-ours');
 
-/** A volume of mL or a few litres that belongs to an additive, not to the wine. */
+/** Reads the volume at term `i`, with the sum or the second unit that belongs to it; gives back its last term. */
 function findVolumeAt(board: Board, i: number): number {
   const volume = volumeAt(board, i);
   if (!volume) return i;
