@@ -28,6 +28,12 @@ export interface Hint {
   readonly named: string;
 }
 
+/** Longer figures than this are slips; own threshold. */
+const MOST_DIGITS = 9;
+
+/** More than any wine holds, in mg/L of SO2; own threshold. */
+const MOST_mg_L = 1000;
+
 const NUMBER = /\d+(?:[.,]\d+)?/g;
 
 /** The way to write a figure plainly, made of the person's own words and figures. */
@@ -36,6 +42,9 @@ export function hintFor(reading: Reading, about: string, mark: DecimalMark): Hin
   const none = { one: first, two: second, named: '' };
   const { fields } = reading;
   const { additive } = fields;
+  // What no wine has is no figure to write otherwise.
+  if (first.length > MOST_DIGITS || second.length > MOST_DIGITS)
+    return { kind: 'other', one: '', two: '', named: '' };
   const split = /(\d)[.,]\s+(\d+)/.exec(about);
   if (split) return { ...none, kind: 'split', one: `${split[1]}${mark}${split[2]}` };
   const thousands = /^\D*?(\d{1,3})[.,](\d{3})\s*(\p{L}[\p{L}\d]*)?$/u.exec(about);
@@ -58,6 +67,7 @@ function isPh(text: string): boolean {
 function ofConcentration(about: string, first: string, named: string): Hint {
   const isPerHectolitre = /g\s*(\/|\p{L}+)\s*h/iu.test(about);
   const mg_L = Number(first.replace(',', '.')) * (isPerHectolitre ? 10 : 1);
+  if (!(mg_L <= MOST_mg_L)) return { kind: 'other', one: '', two: '', named };
   const one = plain(mg_L);
   const hasUnit = isPerHectolitre || /ppm|mg/i.test(about);
   if (hasUnit && named !== '') return { kind: 'powder', one, two: plain(mg_L / 100), named };
