@@ -4,9 +4,7 @@ import { localeMessages } from './locale-messages.ts';
 export function sentenceKeys(ftl: string): string {
   const rows = [...localeMessages(ftl)]
     .toSorted(([a], [b]) => (a < b ? -1 : 1))
-    .map(
-      ([key, values]) => `  ${quoted(key)}: ${values.map((value) => `'${value}'`).join(' | ') || 'never'};`,
-    );
+    .map(([key, values]) => row(quoted(key), values.map((value) => `'${value}'`).join(' | ') || 'never'));
   return [
     '// Made from locales/en.ftl by `node .ci/sentence-keys.ts`: change the locale, not this file.',
     '',
@@ -20,6 +18,15 @@ export function sentenceKeys(ftl: string): string {
     '',
   ].join('\n');
 }
+
+/** As the formatter breaks it. */
+function row(key: string, values: string): string {
+  const whole = `  ${key}: ${values};`;
+  return whole.length <= LONGEST ? whole : `  ${key}:\n    ${values};`;
+}
+
+/** Letters in a line of code. */
+const LONGEST = 110;
 
 function quoted(key: string): string {
   return /^[a-z]\w*$/.test(key) ? key : `'${key}'`;

@@ -103,7 +103,11 @@ dose-too-fine = { at }too little to weigh or measure ({ $short } short): make a 
 dose-gas-too-little = { at }{ $amount } is too little for gas: use a solution.
 dose-bottled = { at }bottled: an addition means opening every bottle. Ask first.
 refused-ammonium = { at }ammonium bisulfite is for grapes and must only (OIV): not for this wine; ask first.
-refused-ammonium-must = Is it must? Then write it whole, with the word must.
+refused-ammonium-must =
+    { $stage ->
+        [assumed] Taken as wine whose fermentations are over. Is it must? Then write it whole, with the word must.
+       *[said] Is it must? Then write it whole, with the word must.
+    }
 dose-nothing = { at }nothing to add.
 dose-rate = { at }{ $dose } SO2 to add, that is { measured } per { $per }
 dose-rate-bare = { at }{ $dose } SO2 to add

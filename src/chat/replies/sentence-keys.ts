@@ -87,7 +87,8 @@ export interface SentenceValues {
   'choice-red': 'amount' | 'count' | 'free' | 'kind' | 'limit' | 'unit';
   'choice-tablet_SO2_g': 'value';
   'choice-tablet_salt_g': 'value';
-  'choice-to': 'additive' | 'amount' | 'count' | 'free' | 'mark' | 'molecular' | 'size' | 'strength' | 'total' | 'unit';
+  'choice-to':
+    'additive' | 'amount' | 'count' | 'free' | 'mark' | 'molecular' | 'size' | 'strength' | 'total' | 'unit';
   'condition-red': 'amount' | 'count' | 'kind' | 'limit' | 'unit';
   'condition-stage': never;
   'dose-bottled': 'vessel';
@@ -205,7 +206,7 @@ export interface SentenceValues {
   read: 'list';
   'reading-read': 'list' | 'vessel';
   'refused-ammonium': 'vessel';
-  'refused-ammonium-must': never;
+  'refused-ammonium-must': 'stage';
   'round-again': never;
   'round-all': 'all';
   'round-amount': 'additive' | 'all' | 'amount' | 'red' | 'redAmount' | 'strength' | 'unit';
@@ -286,7 +287,8 @@ export interface SentenceValues {
   'warning-additive-not-permitted': 'additive';
   'warning-already-dosed': never;
   'warning-basis-fallback': never;
-  'warning-basis-fallback-change': 'change' | 'compared_at_alcohol_percent' | 'compared_at_temperature_C' | 'direction' | 'unit';
+  'warning-basis-fallback-change':
+    'change' | 'compared_at_alcohol_percent' | 'compared_at_temperature_C' | 'direction' | 'unit';
   'warning-free-low-may-bind-all': never;
   'warning-free-needed-high': 'target_free_mg_L' | 'unit';
   'warning-limit-unconfirmed': never;

@@ -22,7 +22,9 @@ export function notPermitted(reading: Reading, answer: DoseAnswer, { manner }: T
     inRound: [first],
     lines: [
       first,
-      line('effect', 'refused-ammonium-must'),
+      line('effect', 'refused-ammonium-must', {
+        stage: reading.assumed.stage === undefined ? 'said' : 'assumed',
+      }),
       ...factLines(reading, manner),
       ...assumedLines(reading, manner, false),
     ],

@@ -31,7 +31,10 @@ export function nothingLines(reading: Reading, answer: DoseAnswer, manner: Manne
   const target = reading.fields.target ?? reading.assumed.target;
   const { free_mg_L, ph } = reading.fields;
   if (target === undefined || free_mg_L === undefined || 'add_mg_L' in target) return [first];
-  const values = { ...targetValues(target, manner), free: `${numberText(free_mg_L, 1, manner.mark)} ${manner.unit}` };
+  const values = {
+    ...targetValues(target, manner),
+    free: `${numberText(free_mg_L, 1, manner.mark)} ${manner.unit}`,
+  };
   if (answer.molecular_mg_L === undefined || ph === undefined)
     return [first, line('effect', 'nothing-why-free', values)];
   const molecular = molecularPerLitre(answer.molecular_mg_L, manner);

@@ -25,6 +25,7 @@ export function chosen(
     const molecular = molecularPerLitre(choice.molecular_mg_L, manner);
     return { lines: [line('first', 'choice-left', { vessel, molecular }), line('first', 'ways-out')] };
   }
-  if (choice.over_limit) return { lines: [line('first', 'choice-over', { vessel, limit: limitText(reading, manner) })] };
+  if (choice.over_limit)
+    return { lines: [line('first', 'choice-over', { vessel, limit: limitText(reading, manner) })] };
   return { target: choice.target };
 }

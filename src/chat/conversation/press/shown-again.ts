@@ -65,7 +65,10 @@ export function workingOf(reading: Reading, mark: DecimalMark, settings: Setting
 export function safetyLines(reading: Reading): Line[] {
   const additive = additiveOf(reading);
   if (additive === undefined) return [line('first', 'old-button')];
-  return [line('first', 'safety-head', { additive: additive.id }), ...cautionLines(additive, true, reading.intent === 'solution' ? 'water' : 'wine')];
+  return [
+    line('first', 'safety-head', { additive: additive.id }),
+    ...cautionLines(additive, true, reading.intent === 'solution' ? 'water' : 'wine'),
+  ];
 }
 
 function buttonsBehind(reading: Reading, warned: readonly Warning[]): (keyof typeof LABELS)[] {
