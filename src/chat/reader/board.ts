@@ -2,6 +2,7 @@ import type { Problem, ProblemCode } from '../../core/problem.ts';
 import type { FoldedText } from './fold-text.ts';
 import type { Grouping } from './numbers.ts';
 import { readDecimal, readNumeral } from './numbers.ts';
+import { concentrationLength } from './join-numbers.ts';
 import type { Term } from './split-terms.ts';
 import { termIn } from './split-terms.ts';
 import type { FieldName, Fields, Marks, Place, ReadNote, ReaderSettings } from './understood.ts';
@@ -117,11 +118,26 @@ export const isFound = (board: Board, field: FieldName): boolean =>
 export const findingOf = <F extends FieldName>(board: Board, field: F): Finding<F> | undefined =>
   board.findings.find((finding) => finding.field === field) as Finding<F> | undefined;
 
-/** Whether a label before figure `i` claims it: `free 12 tablets` is free SO2, and no twelve tablets. */
-export function isLabelled(board: Board, i: number): boolean {
+/** The label before figure `i` that claims it (past a colon or "is"); undefined where none does. */
+export function labelBefore(board: Board, i: number): number | undefined {
   let k = i - 1;
   while (isMark(board, k, ':') || isMark(board, k, '=') || (isCue(board, k, 'is') && !isLabel(board, k))) k--;
-  return isLabel(board, k);
+  return isLabel(board, k) && !hasOwnFigure(board, k) ? k : undefined;
+}
+
+/** Whether a label before figure `i` claims it: `free 12 tablets` is free SO2, and no twelve tablets. */
+export const isLabelled = (board: Board, i: number): boolean => labelBefore(board, i) !== undefined;
+
+/** An arrow, a plus, a verb that takes the figure behind it. */
+const claimsNext = (board: Board, i: number): boolean =>
+  ['->', '=>', '→', '+'].some((mark) => isMark(board, i, mark)) ||
+  (['target', 'to', 'add', 'raise', 'by'] as const).some((cue) => isCue(board, i, cue));
+
+/** `3.52 pH 6 barrels`: a label behind its figure claims no second one. */
+function hasOwnFigure(board: Board, k: number): boolean {
+  const at = k - 1 - concentrationLength(board.terms, k - 1);
+  if (board.terms[at]?.kind !== 'number' || board.taken[at] === true) return false;
+  return !claimsNext(board, at - 1) && labelBefore(board, at) === undefined;
 }
 
 const isLabel = (board: Board, i: number): boolean =>

@@ -59,8 +59,25 @@ function joinFractions(terms: readonly Term[]): Term[] {
   return out;
 }
 
-const CLAIMS_NEXT =
-  /^(label:(?!volume)|vessel:|cue:(target|to|add|raise|lot|molecular|from|by|need|at)$|stage:|unit:none)/;
+const CLAIMS_NEXT = /^(label:(?!volume)|vessel:|cue:(target|to|add|raise|lot|molecular|from|by|need|at)$)/;
+
+/** How many terms a concentration takes that ends at term `i`: `ppm` one, `g/L` three. */
+export function concentrationLength(terms: readonly Term[], i: number): number {
+  if (has(terms[i], /^unit:(ppm|mg\/L)$/)) return 1;
+  const per = terms[i - 1]?.text === '/' || has(terms[i - 1], /^cue:per$/);
+  return has(terms[i], /^unit:(L|hL)$/) && per && has(terms[i - 2], /^unit:(g|mg)$/) ? 3 : 0;
+}
+
+/** `3.52 pH 1 250 L`: a label behind its figure claims no second one. */
+function hasOwnFigure(terms: readonly Term[], k: number): boolean {
+  if (!has(terms[k], /^(label:|cue:molecular$)/)) return false;
+  const at = k - 1 - concentrationLength(terms, k - 1);
+  if (terms[at]?.kind !== 'number') return false;
+  // `T8 alc 13.5`: the vessel's number is no figure.
+  const glued =
+    termIn(terms, at).gap === false && terms[at - 1]?.kind === 'word' && !has(terms[at - 1], /^label:/);
+  return !glued && !isClaimedBefore(terms, at - 1);
+}
 
 /** Marks that claim the figure behind them: `-> 35 950 gal`, `+25 900 gal`, `@ 18 900 gal`. */
 const CLAIMING_MARKS = new Set(['->', '=>', '→', '+', '@', '<', '>', '≈']);
@@ -77,7 +94,7 @@ function isClaimedBefore(terms: readonly Term[], i: number): boolean {
       (has(terms[k], /^cue:is$/) && !has(terms[k], CLAIMS_NEXT)))
   )
     k--;
-  return k >= 0 && has(terms[k], CLAIMS_NEXT);
+  return k >= 0 && has(terms[k], CLAIMS_NEXT) && !hasOwnFigure(terms, k);
 }
 
 /** `T8 900 gal`: the 8 is the vessel's, or the label's that it is glued to. */

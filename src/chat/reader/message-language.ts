@@ -13,7 +13,7 @@ const GROUPS = new Map<Language, string>(
 );
 
 /** Words that are the same in most languages and tell none. */
-const INTERNATIONAL = new Set(['ppm', 'kmbs', 'so2', 'tank', 'total', 'bio', 'organic', 'merlot', 'mol', 'lot', 'vol', 'alc', 'dep', 'cuve', 'vasca', 'cuba', 'deposito', 'barrique', 'barrica']); // prettier-ignore
+const INTERNATIONAL = new Set(['libre', 'livre', 'libera', 'libero', 'frei', 'freie', 'freies', 'totale', 'gesamt', 'ppm', 'kmbs', 'so2', 'tank', 'total', 'bio', 'organic', 'merlot', 'mol', 'lot', 'vol', 'alc', 'dep', 'cuve', 'vasca', 'cuba', 'deposito', 'barrique', 'barrica']); // prettier-ignore
 
 const tellsEnglish = ({ kind, text, tags }: Term): boolean =>
   kind === 'word' &&

@@ -1,12 +1,11 @@
 import type { Board } from '../board.ts';
-import { hasTag, isCue, isFound, isFree, isMark } from '../board.ts';
+import { hasTag, isCue, isFound, isFree, labelBefore } from '../board.ts';
 import { concentrationAt } from '../units.ts';
 import { aimAt, keepAddition } from './aim.ts';
 
 const isLabelBefore = (board: Board, i: number): boolean => {
-  const k =
-    isMark(board, i - 1, ':') || isMark(board, i - 1, '=') || isCue(board, i - 1, 'is') ? i - 2 : i - 1;
-  return board.terms[k]?.tags.some((tag) => tag.startsWith('label:') && tag !== 'label:so2') === true;
+  const label = labelBefore(board, i);
+  return label !== undefined && !hasTag(board, label, 'label:so2');
 };
 
 /** Finds a concentration that is an addition by what follows it, or by the past tense: `28 ppm addition`, `60 ppm SO2 added`. */

@@ -1,7 +1,19 @@
 import type { AdditiveId } from '../../../core/additives/additive-id.ts';
 import { readStrength } from '../../../core/additives/read-strength.ts';
 import type { Board } from '../board.ts';
-import { claim, figureAt, find, findingOf, hasTag, isCue, isFree, isMark, refuse, termAt } from '../board.ts';
+import {
+  claim,
+  figureAt,
+  find,
+  findingOf,
+  hasTag,
+  isCue,
+  isFree,
+  isMark,
+  refuse,
+  termAt,
+  labelBefore,
+} from '../board.ts';
 import { concentrationAt, unitAt } from '../units.ts';
 
 const KNOWN: readonly AdditiveId[] = [
@@ -21,14 +33,15 @@ interface StrengthAt {
   readonly perLitre: boolean;
 }
 
-const isLabelled = (board: Board, i: number): boolean =>
+const isOtherLabel = (board: Board, i: number): boolean =>
   board.terms[i]?.tags.some((tag) => tag.startsWith('label:') && tag !== 'label:so2') === true;
 
 function strengthFrom(board: Board, i: number): StrengthAt | undefined {
-  if (!isFree(board, i) || isMark(board, i - 1, '+') || isLabelled(board, i - 1)) return undefined;
+  if (!isFree(board, i) || isMark(board, i - 1, '+') || isOtherLabel(board, labelBefore(board, i) ?? -1))
+    return undefined;
   const { value } = figureAt(board, i);
   const percent = isMark(board, i + 1, '%') || isCue(board, i + 1, 'percent');
-  if (percent && !isLabelled(board, i + 2)) return { percent: value, from: i, to: i + 1, perLitre: false };
+  if (percent && !isOtherLabel(board, i + 2)) return { percent: value, from: i, to: i + 1, perLitre: false };
   const per = concentrationAt(board, i + 1);
   return per?.id === 'g/L' ? { percent: value / 10, from: i, to: per.to, perLitre: true } : undefined;
 }

@@ -110,7 +110,7 @@ export function figureBeside(board: Board, i: number, label: LabelId): Beside | 
   const after = figureAfter(board, i);
   const behind = figureBefore(board, i);
   const before = behind && suits(board, label, behind.at) ? behind : undefined;
-  if (after && before && !suits(board, label, after.at)) return before;
+  if (after && before && (!suits(board, label, after.at) || isPastDash(board, i, after))) return before;
   if (!after || hasForeignUnit(board, after.at)) return before ?? after;
   if (!before || hasForeignUnit(board, before.at)) return after;
   const figure = (one: Beside): Figure =>
@@ -126,6 +126,10 @@ export function figureBeside(board: Board, i: number, label: LabelId): Beside | 
         : before;
   return endsWithLabel(board, after.to + 1) ? before : after;
 }
+
+/** ` - ` with blanks on both sides parts fields; a figure beyond it is the label's only where none stands nearer. */
+const isPastDash = (board: Board, i: number, { at }: Beside): boolean =>
+  board.terms.slice(i + 1, at).some(({ kind, text, gap }) => kind === 'mark' && text === '-' && gap);
 
 /** Whether the unit behind a figure may be this label's: degrees are of temperature, ppm of SO2, per cent of alcohol or sugar. */
 function suits(board: Board, label: LabelId, at: number): boolean {

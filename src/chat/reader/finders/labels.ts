@@ -73,6 +73,8 @@ function findLabel(board: Board, i: number, label: LabelId): void {
   const [from, to] = [Math.min(i, figureAt(board, beside.at).from), Math.max(i, beside.to)];
   if (isCue(board, i - 1, 'not') && beside.at > i) return refuse(board, 'ambiguous-number', i - 1, to);
   if (isLimit(board, i, beside)) return setAside(board, from, to);
+  if (hasTag(board, beside.at + 1, 'unit:none-of-ours'))
+    return setAside(board, from, Math.max(to, beside.at + 1));
   if (isSmallTalk(board, label, beside)) return;
   if (hasForeignUnit(board, beside.at)) {
     if (label !== 'volume' && label !== 'so2') refuse(board, 'unit-mismatch', from, to + 1);

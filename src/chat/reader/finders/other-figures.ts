@@ -1,11 +1,13 @@
 import type { Board } from '../board.ts';
-import { hasTag, isCue, isFree, isMark, refuse, setAside, termAt } from '../board.ts';
+import { hasTag, isCue, isFree, isMark, refuse, setAside, termAt, labelBefore } from '../board.ts';
 
 const textAt = (board: Board, i: number): string => board.terms[i]?.text ?? '';
 const isPlainWhole = (board: Board, i: number): boolean =>
   isFree(board, i) && /^\d+$/.test(textAt(board, i)) && termAt(board, i).value === undefined;
-const isLabelBefore = (board: Board, i: number): boolean =>
-  board.terms[i - 1]?.tags.some((tag) => tag.startsWith('label:') && tag !== 'label:aside') === true;
+const isLabelBefore = (board: Board, i: number): boolean => {
+  const label = labelBefore(board, i);
+  return label !== undefined && !hasTag(board, label, 'label:aside');
+};
 const isUnitAfter = (board: Board, i: number): boolean =>
   board.terms[i + 1]?.tags.some((tag) => tag.startsWith('unit:') && tag !== 'unit:none-of-ours') === true;
 
@@ -57,7 +59,7 @@ function brokenDecimalEnd(board: Board, i: number): number | undefined {
     /^\d{1,2}$/.test(textAt(board, i + 2)) &&
     termAt(board, i + 2).gap &&
     !isUnitAfter(board, i + 2) &&
-    !hasTag(board, i + 3, 'label:free')
+    (!hasTag(board, i + 3, 'label:free') || isFree(board, i + 4))
     ? i + 2
     : undefined;
 }

@@ -1,5 +1,5 @@
 import type { Board } from '../board.ts';
-import { claim, figureAt, find, hasTag, isCue, isFound, isFree, isMark, refuse, termAt } from '../board.ts';
+import { claim, figureAt, hasTag, isCue, isFound, isFree, isMark, refuse, termAt } from '../board.ts';
 import type { UnitId } from '../words/words.ts';
 import type { UnitAt } from '../units.ts';
 import { VOLUME_UNITS, concentrationAt, unitAt } from '../units.ts';
@@ -25,7 +25,7 @@ function perAfter(board: Board, i: number): number | undefined {
 function baseAt(
   board: Board,
   i: number,
-): { volume_L?: number; fruit?: true; unsure?: true; to: number } | undefined {
+): { volume_L?: number; fruit?: true; unsure?: true; gallon?: true; to: number } | undefined {
   const figure = isFree(board, i) ? figureAt(board, i) : undefined;
   const at = figure ? i + 1 : i;
   if (hasTag(board, at, 'vessel:barrel')) return { volume_L: (figure?.value ?? 1) * USUAL_BARREL_L, to: at };
@@ -36,7 +36,8 @@ function baseAt(
   if (mass) return { fruit: true, to: mass.to };
   const volume = unitAt(board, at, VOLUME_UNITS);
   if (!volume || (figure && (figure.unsure || !(figure.value > 0)))) return undefined;
-  return { volume_L: (figure?.value ?? 1) * litresOf(board, volume.id), to: volume.to };
+  const volume_L = (figure?.value ?? 1) * litresOf(board, volume.id);
+  return { volume_L, to: volume.to, ...(volume.id === 'gal' && { gallon: true as const }) };
 }
 
 /** `40 g per barrel`: a mass for a usual barrel; with a volume beside it, nobody knows of which. */
@@ -76,8 +77,10 @@ function findRateAt(board: Board, i: number): void {
   const rate = (value * gramsOf(unit.id) * 1000) / (base.volume_L ?? Number.NaN);
   const single = per + 1 === base.to && unit.id === 'g' && unitAt(board, per + 1, ['L', 'hL']) !== undefined;
   if (single) return refuse(board, 'ambiguous-number', i, base.to);
-  find(board, 'rate_mg_L', rate, 'unit', i, unit.to);
   between(unit.to + 1, base.to);
+  board.findings.push({ field: 'rate_mg_L', value: rate, said: 'unit', from: i, to: base.to });
+  claim(board, i, unit.to);
+  if (base.gallon) board.marks.gallonRead = true;
 }
 
 /** Finds a rate of additive: `1 g per 10 L`, `1 lb/1000 gal`. `g/hL`, `mg/L` and `ppm` are none. */

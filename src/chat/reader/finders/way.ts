@@ -10,7 +10,7 @@ const SMALLEST_CLEAR_STEP_mg_L = 5;
 /** `from 18 to 32`, `free 18 to 32`, `18 -> 32`: where it is and where it should go. */
 function findWayAt(board: Board, i: number): boolean {
   const first = aimAt(board, i);
-  if (!first || first.kind === 'molecular' || first.kind === 'ph') return false;
+  if (!first || (first.kind !== undefined && first.kind !== 'free')) return false;
   const joint = first.to + 1;
   const arrow = isArrow(board, joint);
   if (!arrow && !isCue(board, joint, 'to')) return false;
