@@ -53,6 +53,10 @@ export function roundFoot(
   ];
 }
 
+/** Whether a vessel's line gives an amount. */
+const isWeighed = ({ outcome }: SaidInRound): boolean =>
+  outcome.inRound.some(({ key }) => key.startsWith('round-dose'));
+
 function hasShortCautions(lines: readonly Line[]): boolean {
   return lines.some(({ key }) => key === 'cautions-short');
 }
@@ -68,7 +72,7 @@ function stockLines(said: readonly SaidInRound[], mark: DecimalMark): Line[] {
     const answer = doseOf(one);
     const each = answer?.per_vessel ?? answer;
     const { measure, stock } = each ?? {};
-    if (!measure || !stock || !one.outcome.inRound.some(({ key }) => key.startsWith('round-dose'))) return [];
+    if (!measure || !stock || !isWeighed(one)) return [];
     return [{ vessel: one.name, measure, stock }];
   });
   const strength = numberText(small[0]?.stock.strength_percent ?? 0, 1, mark);
@@ -76,7 +80,9 @@ function stockLines(said: readonly SaidInRound[], mark: DecimalMark): Line[] {
   const list = small.map(({ vessel, stock }) =>
     part('round-stock-of', { vessel, amount: measureText(stock.measure, mark) }),
   );
-  const hasRed = said.some((one) => redFigures(doseOf(one) ?? { warnings: [] }) !== undefined);
+  const hasRed = said.some(
+    (one) => isWeighed(one) && redFigures(doseOf(one) ?? { warnings: [] }) !== undefined,
+  );
   return [
     ...(hasRed ? [line('condition', 'round-red')] : []),
     ...listLine('effect', isRest ? 'round-rest' : 'round-stock', list).map((one) => ({
