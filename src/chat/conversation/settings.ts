@@ -1,4 +1,5 @@
 import type { Basis } from '../../core/wine.ts';
+import { READER_DEFAULTS } from '../reader/reader-defaults.ts';
 import type { ReaderSettings } from '../reader/understood.ts';
 
 /** The system of units a chat works in: it decides what a bare number, a gallon and a bare temperature mean. */
@@ -20,18 +21,8 @@ const UNITS_OF: Readonly<
   imperial: { units: 'imperial', gallon: 'imperial', volumeUnit: 'galUK', temperatureUnit: 'C' },
 };
 
-/**
- * What holds for a chat that has set nothing: metric, US gallons, potassium metabisulfite powder, pK 1.81, and the
- * usual molecular targets in mg/L (0.6 and 0.8: Waterhouse, Sacks and Jeffery, Understanding Wine Chemistry, table
- * 17.1; 1.5 for sweet: a weak source; the split by colour is common practice).
- */
-export const DEFAULT_SETTINGS: Settings = {
-  language: 'en',
-  usualAdditive: 'potassium-metabisulfite',
-  targets: { red: 0.6, white: 0.8, sweet: 1.5 },
-  basis: 'pk-1.81',
-  ...UNITS_OF.metric,
-};
+/** What holds for a chat that has set nothing: what the reader takes for granted, pK 1.81, rates per hectolitre. */
+export const DEFAULT_SETTINGS: Settings = { ...READER_DEFAULTS, basis: 'pk-1.81', units: 'metric' };
 
 /**
  * The settings of a chat that works in another system of units.

@@ -1,11 +1,6 @@
 import type { Language } from './understood.ts';
+import { ALL_WORDS } from './words/all.ts';
 import type { DangerId, Words } from './words/words.ts';
-import { de } from './words/de.ts';
-import { en } from './words/en.ts';
-import { es } from './words/es.ts';
-import { fr } from './words/fr.ts';
-import { it } from './words/it.ts';
-import { pt } from './words/pt.ts';
 
 /** What an emergency is about: it decides which line of the reply comes first. */
 export type Danger = 'person' | 'eyes' | 'swallowed' | 'skin' | 'gas';
@@ -48,7 +43,7 @@ function indexOf(lists: readonly Words[]): ReadonlyMap<string, readonly Phrase[]
   return index;
 }
 
-const INDEX = indexOf([en, es, fr, it, de, pt]);
+const INDEX = indexOf(ALL_WORDS);
 
 /** The groups that make an emergency or open one; without any of them nothing further is looked at. */
 const OPENERS: ReadonlySet<DangerId> = new Set<DangerId>([

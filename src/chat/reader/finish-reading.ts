@@ -6,8 +6,12 @@ import { ASKED_FIELDS } from './understood.ts';
 const inOrder = (asks: ReadonlySet<AskedField>): AskedField[] =>
   ASKED_FIELDS.filter((field) => asks.has(field));
 
-const hasNoUsualTarget = ({ category, alcohol_percent }: Fields): boolean =>
-  category === 'sparkling' || category === 'fortified' || (alcohol_percent ?? 0) >= 17;
+/** Alcohol from which no usual target holds, % vol (own threshold, no source). */
+const STRONG_percent = 17;
+
+/** Whether a wine has no usual target, so that it is asked: sparkling, fortified, 17 % vol and more. */
+export const hasNoUsualTarget = ({ category, alcohol_percent }: Fields): boolean =>
+  category === 'sparkling' || category === 'fortified' || (alcohol_percent ?? 0) >= STRONG_percent;
 
 /** The usual target of this kind of wine; sugar alone never makes it sweet. */
 function usualTarget({ style, category }: Fields, { targets }: ReaderSettings): Target {

@@ -18,7 +18,6 @@ export interface Lexicon {
   readonly formulas: ReadonlyMap<string, readonly string[]>;
   /** Long words that a slip of one letter may be mended to, by first letter. */
   readonly mendable: ReadonlyMap<string, readonly string[]>;
-  readonly groups: ReadonlyMap<Language, string>;
 }
 
 const MENDABLE =
@@ -68,7 +67,6 @@ export function buildLexicon(lists: readonly Words[]): Lexicon {
     longest,
     formulas,
     mendable,
-    groups: new Map(lists.map(({ language, groups }) => [language, groups])),
   };
 }
 

@@ -1,16 +1,9 @@
-import { en } from './words/en.ts';
-import { es } from './words/es.ts';
-import { fr } from './words/fr.ts';
-import { it } from './words/it.ts';
-import { de } from './words/de.ts';
-import { pt } from './words/pt.ts';
+import { ALL_WORDS } from './words/all.ts';
 import type { Grouping } from './numbers.ts';
 import type { Term } from './split-terms.ts';
 import type { Language } from './understood.ts';
 
-const GROUPS = new Map<Language, string>(
-  [en, es, fr, it, de, pt].map(({ language, groups }) => [language, groups]),
-);
+const GROUPS = new Map<Language, string>(ALL_WORDS.map(({ language, groups }) => [language, groups]));
 
 /** Words that are the same in most languages and tell none. */
 const INTERNATIONAL = new Set(['libre', 'livre', 'libera', 'libero', 'frei', 'freie', 'freies', 'totale', 'gesamt', 'ppm', 'kmbs', 'so2', 'tank', 'total', 'bio', 'organic', 'merlot', 'mol', 'lot', 'vol', 'alc', 'dep', 'cuve', 'vasca', 'cuba', 'deposito', 'barrique', 'barrica']); // prettier-ignore

@@ -1,6 +1,11 @@
 import { litresFrom } from '../../core/units/volume.ts';
 import { readDecimal, readNumeral } from './numbers.ts';
-import type { AwaitedField, Fields, Reading, ReaderSettings } from './understood.ts';
+import { problemOf } from './refine/bounds.ts';
+import { MOST_BARE_MOLECULAR_mg_L } from './finders/aim.ts';
+import type { AwaitedField, FieldName, Fields, Reading, ReaderSettings } from './understood.ts';
+
+/** Beyond any figure of a cellar, whatever its unit. */
+const HUGE = 1e12;
 
 const bare = /^([+-]?)(\d+(?:[.,']\d+)?|\d{1,3}(?: \d{3})+)\s*(%|g|ppm|mg\/l|l|ph)?[.!]?$/;
 
@@ -22,7 +27,7 @@ function fieldsFor(
       return asked([undefined, 'ppm', 'mg/l']) ? { free_mg_L: value } : undefined;
     case 'target':
       if (!asked([undefined, 'ppm', 'mg/l'])) return undefined;
-      return { target: value <= 2 ? { molecular_mg_L: value } : { free_mg_L: value } };
+      return { target: value <= MOST_BARE_MOLECULAR_mg_L ? { molecular_mg_L: value } : { free_mg_L: value } };
     case 'strength_percent':
       return asked([undefined, '%']) ? { strength_percent: value } : undefined;
     case 'tablet_salt_g':
@@ -58,10 +63,13 @@ export function readWaiting(
       ? { value: readDecimal(raw), unsure: false }
       : readNumeral(raw, { point: settings.language !== 'en', comma: settings.language === 'en' });
   const value = match[1] === '-' ? -numeral.value : numeral.value;
-  const fields = numeral.unsure ? undefined : fieldsFor(waiting.field, value, match[3], settings);
-  const problems = numeral.unsure
-    ? [{ code: 'ambiguous-number' as const, about: raw }]
-    : outOfBounds(fields ?? {}, text);
+  const isHuge = !(Math.abs(value) < HUGE);
+  const fields = numeral.unsure || isHuge ? undefined : fieldsFor(waiting.field, value, match[3], settings);
+  const problems = isHuge
+    ? [{ code: 'value-out-of-range' as const, about: raw.slice(0, 20) }]
+    : numeral.unsure
+      ? [{ code: 'ambiguous-number' as const, about: raw }]
+      : outOfBounds(fields ?? {}, text);
   if (!fields && problems.length === 0) return undefined;
   return {
     intent: waiting.reading.intent,
@@ -76,12 +84,8 @@ export function readWaiting(
   };
 }
 
-const outOfBounds = (fields: Fields, about: string): Reading['problems'] => {
-  const { ph, volume_L, free_mg_L } = fields;
-  if (ph !== undefined && (ph < 2.5 || ph > 4.8)) return [{ code: 'ph-out-of-range', about }];
-  if (volume_L !== undefined && volume_L <= 0) return [{ code: 'volume-not-positive', about }];
-  if (volume_L !== undefined && volume_L > 10_000_000) return [{ code: 'value-out-of-range', about }];
-  if (free_mg_L !== undefined && free_mg_L < 0) return [{ code: 'negative-value', about }];
-  if (free_mg_L !== undefined && free_mg_L > 1000) return [{ code: 'value-out-of-range', about }];
-  return [];
-};
+const outOfBounds = (fields: Fields, about: string): Reading['problems'] =>
+  Object.entries(fields).flatMap(([field, value]: [string, Fields[FieldName]]) => {
+    const code = problemOf(field as FieldName, value);
+    return code === undefined ? [] : [{ code, about }];
+  });

@@ -1,9 +1,8 @@
 import type { Language } from '../../chat/reader/understood.ts';
-
-const LANGUAGES: readonly string[] = ['en', 'es', 'fr', 'it', 'de', 'pt'] satisfies Language[];
+import { isLanguage } from '../languages.ts';
 
 /** The language of a phone's IETF tag (`pt-BR` → `pt`); English when it is none of ours, or unknown. */
 export function languageOf(tag: string | undefined): Language {
   const base = tag?.split('-', 1)[0]?.toLowerCase() ?? '';
-  return LANGUAGES.includes(base) ? (base as Language) : 'en';
+  return isLanguage(base) ? base : 'en';
 }

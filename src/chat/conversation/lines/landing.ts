@@ -1,4 +1,5 @@
 import { riseExpected } from '../../../core/binding/free-expected.ts';
+import { FREE_LOW_mg_L } from '../../../core/binding/free-expected.ts';
 import type { DoseAnswer, EffectAnswer } from '../../../core/dose/answer.ts';
 import type { Reading } from '../../reader/understood.ts';
 import { concentrationText, molecularText } from '../../replies/quantity-text.ts';
@@ -11,9 +12,6 @@ type Landing = Pick<
   DoseAnswer & EffectAnswer,
   'free_after_mg_L' | 'free_expected_mg_L' | 'molecular_after_mg_L' | 'molecular_mg_L'
 >;
-
-/** Free SO2 in mg/L below which much or all of an addition may bind; core warns with a code of its own. */
-const LOW_FREE_mg_L = 10;
 
 /** A rise in mg/L that no reading of free SO2 tells from none (own threshold). */
 const READING_ERROR_mg_L = 1;
@@ -45,7 +43,7 @@ export function landingLine(reading: Reading, answer: Landing, manner: Manner): 
     range: rangeText(free_expected_mg_L, manner),
   };
   if (free_after_mg_L - free_mg_L < READING_ERROR_mg_L) return line('effect', 'effect-land-small', values);
-  if (free_mg_L < LOW_FREE_mg_L) return line('effect', 'effect-land-low', values);
+  if (free_mg_L < FREE_LOW_mg_L) return line('effect', 'effect-land-low', values);
   if (answer.molecular_after_mg_L === undefined) return line('effect', 'effect-land', values);
   const molecular = molecularText(answer.molecular_after_mg_L, manner.mark);
   if (answer.molecular_mg_L === undefined)

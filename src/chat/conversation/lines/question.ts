@@ -1,4 +1,5 @@
 import { STAGES_WITHOUT_TARGET } from '../../../core/wine.ts';
+import { hasNoUsualTarget } from '../../reader/finish-reading.ts';
 import type { AskedField, Reading } from '../../reader/understood.ts';
 import type { Line } from '../../replies/reply.ts';
 import type { Manner } from '../manner.ts';
@@ -44,9 +45,5 @@ function targetQuestion(reading: Reading, manner: Manner, settings: Settings): O
   const { fields } = reading;
   if (STAGES_WITHOUT_TARGET.includes(fields.stage ?? 'finished'))
     return { key: 'ask-target-stage', values: wholeExample(reading, manner, settings) };
-  const unusual = fields.category === 'sparkling' || fields.category === 'fortified';
-  return {
-    key: 'ask-target',
-    values: { usual: unusual || (fields.alcohol_percent ?? 0) >= 17 ? 'none' : 'some' },
-  };
+  return { key: 'ask-target', values: { usual: hasNoUsualTarget(fields) ? 'none' : 'some' } };
 }

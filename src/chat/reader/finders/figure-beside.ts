@@ -1,6 +1,8 @@
+import { isWithinBounds } from '../../../core/bounds.ts';
 import type { Board, Figure } from '../board.ts';
 import { decimalAt, figureAt, hasTag, isCue, isFree, isMark, termAt } from '../board.ts';
 import type { LabelId } from '../words/words.ts';
+import { isPhValue } from '../ph-like.ts';
 import { MASS_UNITS, VOLUME_UNITS, concentrationAt, unitAt } from '../units.ts';
 
 const LABELS: readonly LabelId[] = [
@@ -99,9 +101,9 @@ export const hasForeignUnit = (board: Board, at: number): boolean =>
 
 /** Whether a figure may be what the label says, so that its neighbour's figure is not taken for it. */
 function fits(label: LabelId, { value }: Figure): boolean {
-  if (label === 'ph') return value >= 2.5 && value <= 4.8;
+  if (label === 'ph') return isWithinBounds('ph', value);
   if (label === 'alcohol') return value >= 0 && value <= 25;
-  const isPhLike = value >= 2.7 && value <= 4.5 && !Number.isInteger(value);
+  const isPhLike = isPhValue(value) && !Number.isInteger(value);
   return !isPhLike && (label !== 'free' || value < 400);
 }
 

@@ -5,6 +5,9 @@ import type { LabelId } from '../words/words.ts';
 import { concentrationAt, mg_L_IN } from '../units.ts';
 import type { Beside } from './figure-beside.ts';
 
+/** A figure without the word free is free SO2 up to this; above it may be total (mg/L). */
+export const MOST_UNLABELLED_FREE_mg_L = 60;
+
 /** Writes the figure that a label names as its field, in the field's unit; or refuses it. */
 export function keepFigure(board: Board, label: LabelId, beside: Beside, from: number, to: number): void {
   const said: Said = 'labelled';
@@ -64,7 +67,7 @@ export function keepFigure(board: Board, label: LabelId, beside: Beside, from: n
 
 /** `SO2 18` is free SO2 up to 60 and said; above it may be total: ask. */
 function keepBareSO2(board: Board, value: number, from: number, to: number): void {
-  if (value > 60) return refuse(board, 'ambiguous-number', from, to);
+  if (value > MOST_UNLABELLED_FREE_mg_L) return refuse(board, 'ambiguous-number', from, to);
   board.notes.push({ id: 'free-unlabelled', text: placeOf(board, from, to).text });
   find(board, 'free_mg_L', value, 'bare', from, to);
 }

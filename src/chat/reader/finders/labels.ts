@@ -85,7 +85,8 @@ function findLabel(board: Board, i: number, label: LabelId): void {
     isFree(board, beside.at + 2) &&
     (label === 'so2' || label === 'free' || label === 'total' || label === 'ph')
   )
-    return claimPairLabel(board, i);
+    // The pair (`SO2 18/60`) is read by the finder of pairs; the label only says that it is one.
+    return claim(board, i, i);
   const below =
     beside.at < i &&
     isMark(board, beside.at - 1, '-') &&
@@ -98,11 +99,6 @@ function findLabel(board: Board, i: number, label: LabelId): void {
   if (corrected !== undefined && figureAt(board, corrected).value !== figureAt(board, beside.at).value)
     return refuse(board, 'conflicting-values', from, corrected);
   keepFigure(board, label, beside, from, to);
-}
-
-/** A pair after its label (`SO2 18/60`) is read by the finder of pairs; the label only says that it is one. */
-function claimPairLabel(board: Board, i: number): void {
-  claim(board, i, i);
 }
 
 /** `free 20 hl`: the figure after the label was read as a volume or a mass. */

@@ -9,18 +9,13 @@ import {
   isMark,
   refuse,
   setAside,
-  termAt,
 } from '../board.ts';
 import { strangerBefore } from '../stranger.ts';
+import { isPhLike } from '../ph-like.ts';
 import { concentrationAt } from '../units.ts';
 
 /** Below this ratio the second figure may be the next mark of a scale, not the total. */
 const LEAST_CLEAR_RATIO = 1.2;
-
-const isPhLike = (board: Board, i: number): boolean => {
-  const { value } = decimalAt(board, i);
-  return /^\d[.,']\d+$/.test(termAt(board, i).text) && value >= 2.7 && value <= 4.5;
-};
 
 const isSlash = (board: Board, i: number): boolean => isMark(board, i, '/');
 
@@ -40,6 +35,7 @@ function findFreeAndTotal(board: Board, i: number, from: number): void {
   const [free, total] = [figureAt(board, i).value, figureAt(board, i + 2).value];
   const unit = concentrationAt(board, i + 3);
   const to = unit?.to ?? i + 2;
+  if (unit?.id === 'g/L') return refuse(board, 'unit-mismatch', i, to);
   if (from === i && !isNamed(board, i, i + 2) && isDate(free, total))
     return refuse(board, 'ambiguous-number', i, to);
   if (total < free) return refuse(board, 'total-below-free', i, to);
@@ -65,16 +61,10 @@ export function findPairs(board: Board): void {
     else if (isPhLike(board, i) && !isFound(board, 'ph')) {
       const three = isSlash(board, i + 3) && isFree(board, i + 4);
       find(board, 'ph', decimalAt(board, i).value, 'labelled', i, i);
+      const unit = three ? undefined : concentrationAt(board, i + 3);
       if (three) findFreeAndTotal(board, i + 2, i);
-      else
-        find(
-          board,
-          'free_mg_L',
-          figureAt(board, i + 2).value,
-          'labelled',
-          i + 2,
-          concentrationAt(board, i + 3)?.to ?? i + 2,
-        );
+      else if (unit?.id === 'g/L') refuse(board, 'unit-mismatch', i + 2, unit.to);
+      else find(board, 'free_mg_L', figureAt(board, i + 2).value, 'labelled', i + 2, unit?.to ?? i + 2);
     } else if (hasTag(board, i - 1, 'label:total') && !isFreeBefore(board, i))
       refuse(board, 'ambiguous-number', i, i + 2);
     else findFreeAndTotal(board, i, i);

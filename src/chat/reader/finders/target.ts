@@ -6,13 +6,14 @@ import { concentrationAt } from '../units.ts';
 import type { Aim } from './aim.ts';
 import { aimAt, isArrow, keepAddition, keepTarget, kindAt, skipJoins } from './aim.ts';
 
-/** The figure that a verb at term `i` governs: `add 28 ppm`, `target free 35`. */
-function governed(board: Board, i: number): { aim: Aim; label?: Aim['kind'] } | undefined {
+/** The figure that a verb at term `i` governs: `add 28 ppm`, `target free 35`; and whether "to" leads to it. */
+function governed(board: Board, i: number): { aim: Aim; label?: Aim['kind']; leadsTo: boolean } | undefined {
   let k = skipJoins(board, i + 1);
   const label = kindAt(board, k) ?? (hasTag(board, k, 'label:so2') ? 'free' : undefined);
   if (label !== undefined) k = skipJoins(board, k + 1);
   const aim = aimAt(board, k);
-  return aim && { aim, ...(label ? { label } : {}) };
+  const leadsTo = board.terms.slice(i + 1, k).some((_, at) => isCue(board, i + 1 + at, 'to'));
+  return aim && { aim, leadsTo, ...(label ? { label } : {}) };
 }
 
 /** A bare figure is an aim only where the message speaks of wine and nothing foreign stands beside it. */
@@ -45,7 +46,7 @@ function findVerb(board: Board, i: number): void {
   if (isCue(board, i, 'need') && isCue(board, i + 1, 'to')) return;
   const found = governed(board, i);
   if (!found) return;
-  const { aim, label } = found;
+  const { aim, label, leadsTo } = found;
   if (isCue(board, i, 'need') && label === 'ph') return;
   if (declines(board, i)) return refuse(board, 'ambiguous-number', i - 1, aim.to);
   if (hasTag(board, i - 1, 'label:ph')) return refuse(board, 'ambiguous-number', i - 1, aim.to);
@@ -58,8 +59,9 @@ function findVerb(board: Board, i: number): void {
   if (glued && hasTag(board, i - 1, 'label:free')) return refuse(board, 'ambiguous-number', i - 1, aim.to);
   if (isArrow(board, i) || isCue(board, i, 'target')) return keepTarget(board, aim, i, label);
   if (isCue(board, i, 'need')) return findNeed(board, i, found);
+  // `raise free to 30` says where it should go, `raise free 30` by how much.
   if (isCue(board, i, 'add') || isCue(board, i, 'raise') || isCue(board, i, 'by'))
-    return keepAddition(board, aim, i);
+    return leadsTo ? keepTarget(board, aim, i, label) : keepAddition(board, aim, i);
   if (isCue(board, i, 'to')) keepTarget(board, aim, i, label);
 }
 

@@ -1,7 +1,9 @@
 import type { ProblemCode } from '../../../core/problem.ts';
 import type { Target } from '../../../core/wine.ts';
-import type { Board, Finding } from '../board.ts';
+import { isWithinBounds } from '../../../core/bounds.ts';
+import type { Board } from '../board.ts';
 import { placeOf } from '../board.ts';
+import type { FieldName, Fields } from '../understood.ts';
 
 /** The least and most of each field that a cellar has; own thresholds, to keep slips out. No source. */
 const CELLAR_BOUNDS: Readonly<Record<string, readonly [number, number]>> = {
@@ -27,15 +29,17 @@ const targetFigure = (target: Target): readonly [number, number] => {
   return 'free_mg_L' in target ? [target.free_mg_L, 1000] : [target.add_mg_L, 1000];
 };
 
-function problemOf({ field, value }: Finding): ProblemCode | undefined {
-  if (field === 'ph')
-    return (value as number) >= 2.5 && (value as number) <= 4.8 ? undefined : 'ph-out-of-range';
+/** What is wrong with a figure that no cellar has, said in a message or in an answer; undefined where nothing is. */
+export function problemOf(field: FieldName, value: Fields[FieldName]): ProblemCode | undefined {
   if (field === 'target') {
     const [figure, most] = targetFigure(value as Target);
+    if (figure < 0) return 'negative-value';
     return figure > most ? 'value-out-of-range' : undefined;
   }
+  if (typeof value !== 'number') return undefined;
+  if (field === 'ph') return isWithinBounds('ph', value) ? undefined : 'ph-out-of-range';
   const bounds = CELLAR_BOUNDS[field];
-  if (!bounds || typeof value !== 'number') return undefined;
+  if (!bounds) return undefined;
   if (field === 'volume_L' && value <= 0) return 'volume-not-positive';
   if (value < 0 && field !== 'temperature_C') return 'negative-value';
   return value >= bounds[0] && value <= bounds[1] ? undefined : 'value-out-of-range';
@@ -44,7 +48,7 @@ function problemOf({ field, value }: Finding): ProblemCode | undefined {
 /** Refuses what cannot be true: a pH of 36, a tank of 50 million litres. */
 export function settleBounds(board: Board): void {
   for (const finding of board.findings.slice()) {
-    const code = problemOf(finding);
+    const code = problemOf(finding.field, finding.value);
     if (code === undefined) continue;
     board.problems.push({ code, about: placeOf(board, finding.from, finding.to).text });
     board.findings.splice(board.findings.indexOf(finding), 1);

@@ -13,16 +13,10 @@ import {
   termAt,
 } from '../board.ts';
 import { isCellarTalk } from '../cellar-talk.ts';
+import { MOST_UNLABELLED_FREE_mg_L } from '../finders/keep-labelled.ts';
+import { isPhLike } from '../ph-like.ts';
 import { isStranger, strangerBefore } from '../stranger.ts';
 import { concentrationAt, mg_L_IN } from '../units.ts';
-
-/** A figure without the word free is free SO2 up to this; above it may be total (mg/L). */
-const MOST_UNLABELLED_FREE_mg_L = 60;
-
-const isPhLike = (board: Board, i: number): boolean => {
-  const { value } = decimalAt(board, i);
-  return /^\d[.,']\d+$/.test(termAt(board, i).text) && value >= 2.7 && value <= 4.5;
-};
 
 const isWhole = (board: Board, i: number): boolean =>
   termAt(board, i).value === undefined && /^\d+$/.test(termAt(board, i).text);
