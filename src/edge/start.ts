@@ -3,6 +3,7 @@ import type { IncomingMessage } from '../chat/conversation/ports.ts';
 import type { Memory } from '../chat/conversation/memory.ts';
 import { DEFAULT_SETTINGS } from '../chat/conversation/settings.ts';
 import { makeSay } from '../chat/replies/say.ts';
+import { makeAudit } from './audit-workings.ts';
 import { systemClock as clock } from './clock.ts';
 import { readConfig } from './config.ts';
 import { loadEnvironment } from './environment.ts';
@@ -23,6 +24,7 @@ export async function start(): Promise<void> {
   const config = await readConfig(environment);
   for (const name of config.notServedYet) operator.tell(`${name} is not served yet; it changes nothing.`);
 
+  const audit = makeAudit(operator.tell);
   const conversation = {
     handle: (message: IncomingMessage, memory: Memory) => handle(message, memory, DEFAULT_SETTINGS),
     say: makeSay(loadLocales()),
@@ -44,12 +46,14 @@ export async function start(): Promise<void> {
       language: 'en',
       interactive,
       report: operator.report,
+      // A pipe ends with its answer, and waits for nothing more.
+      ...(interactive && { audit }),
     });
   } else {
     const { createLog } = await import('./logging.ts');
     const { serveTelegram } = await import('./telegram/serve-telegram.ts');
     const log = createLog({ level: config.logLevel, secret: botToken, to: STDOUT });
     const { tell } = operator;
-    await serveTelegram({ ...conversation, config: { ...config, botToken }, log, clock, tell });
+    await serveTelegram({ ...conversation, config: { ...config, botToken }, log, clock, tell, audit });
   }
 }

@@ -2,6 +2,7 @@ import type { Handled, IncomingMessage, StatePort } from '../../chat/conversatio
 import { faultReply } from '../../chat/conversation/fault-reply.ts';
 import type { Memory } from '../../chat/conversation/memory.ts';
 import type { Say } from '../../chat/replies/say.ts';
+import type { Audit } from '../audit-workings.ts';
 import type { Clock } from '../clock.ts';
 import type { Log } from '../logging.ts';
 import { failureOf } from './failure.ts';
@@ -13,6 +14,8 @@ import type { Arrival } from './to-message.ts';
 export interface Conversation {
   readonly handle: (message: IncomingMessage, memory: Memory) => Handled;
   readonly say: Say;
+  /** Checks the workings once their replies are sent. */
+  readonly audit?: Audit;
 }
 
 /** So long an answer waits for its tap to be acknowledged, in milliseconds. */
@@ -33,17 +36,18 @@ export interface AnswerOptions extends Conversation {
  * logged. Gives back whether the arrival is done with; if not, the platform has to deliver it again.
  */
 export async function answerArrival(arrival: Arrival, options: AnswerOptions): Promise<boolean> {
-  const { handle, say, state, platform, clock, log, signal } = options;
+  const { handle, say, state, platform, clock, log, signal, audit } = options;
   const { message, chatId, updateId, tapId } = arrival;
   if (signal.aborted) return false;
   const told = tapId === undefined ? undefined : tellTapSeen(tapId, options);
   try {
-    const { writes, replies } = handle(message, await state.load(message));
+    const { writes, replies, answers } = handle(message, await state.load(message));
     const said = replies.map(say);
     await state.commit(writes);
     // Before the answer, but an acknowledgement that is slow to come holds nothing up.
     if (told !== undefined) await Promise.race([told, clock.wait(LONGEST_TAP_WAIT_MS)]);
     const sent = await sendReplies(chatId, said, { api: platform.patient, log, signal });
+    audit?.(answers);
     return sent === 'ended';
   } catch (error) {
     log.error({ err: error, update: updateId }, 'a message could not be answered');

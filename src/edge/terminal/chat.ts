@@ -4,6 +4,7 @@ import type { Memory } from '../../chat/conversation/memory.ts';
 import type { Language } from '../../chat/reader/understood.ts';
 import type { Reply } from '../../chat/replies/reply.ts';
 import type { Said } from '../../chat/replies/say.ts';
+import type { Audit } from '../audit-workings.ts';
 import { batchLines } from './batch-lines.ts';
 
 /** Everything that a chat on a keyboard needs, handed in. */
@@ -16,6 +17,8 @@ export interface TerminalOptions {
   /** The time in milliseconds since 1970. */
   readonly now: () => number;
   readonly language: Language;
+  /** Checks the workings, after their answers. */
+  readonly audit?: Audit;
   /** Tells whoever runs the program of a fault of its own. */
   readonly report: (fault: unknown) => void;
   /** Whether a person sits there: then there is a greeting and a prompt. */
@@ -56,7 +59,7 @@ export async function runTerminal(options: TerminalOptions): Promise<void> {
 }
 
 async function answer(text: string, count: number, options: TerminalOptions): Promise<Said[]> {
-  const { handle, state, say, now, language, report } = options;
+  const { handle, state, say, now, language, report, audit } = options;
   const message: IncomingMessage = {
     cellar: 'terminal',
     chat: 'terminal',
@@ -67,9 +70,10 @@ async function answer(text: string, count: number, options: TerminalOptions): Pr
     content: { kind: 'text', text },
   };
   try {
-    const { writes, replies } = handle(message, await state.load(message));
+    const { writes, replies, answers } = handle(message, await state.load(message));
     const said = replies.map(say);
     await state.commit(writes);
+    audit?.(answers);
     return said;
   } catch (error) {
     report(error);
