@@ -36,7 +36,7 @@ function askAdditive({ marks }: Draft, fields: Fields, asks: Set<AskedField>): v
 
 /** Litres that may be assumed: barrels without a size, by count or by number. */
 function assumedVolume({ intent, marks }: Draft, fields: Fields): number | undefined {
-  if (fields.volume_L !== undefined || marks.fruitByWeight || marks.castsWithoutSize || marks.eachOrTotal)
+  if (fields.volume_L !== undefined || marks.fruitByWeight || marks.casksWithoutSize || marks.eachOrTotal)
     return undefined;
   if (intent === 'reading' || (intent === 'added' && !marks.barrelsCounted)) return undefined;
   return marks.barrelsAssumed_L;

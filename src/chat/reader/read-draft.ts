@@ -101,7 +101,7 @@ function shareVolume(board: Board, fields: Record<string, unknown>): void {
 /** One numbered barrel without a size counts as a usual one. */
 function assumeBarrel(board: Board): void {
   const vessel = findingOf(board, 'vessel')?.value;
-  if (vessel?.startsWith('barrel ') && !isFound(board, 'volume_L') && !board.marks.castsWithoutSize)
+  if (vessel?.startsWith('barrel ') && !isFound(board, 'volume_L') && !board.marks.casksWithoutSize)
     board.marks.barrelsAssumed_L ??= USUAL_BARREL_L;
 }
 
@@ -132,7 +132,7 @@ function noteCask(board: Board): void {
       .slice(named.from, named.to + 1)
       .some((_, k) => termAt(board, named.from + k).tags.includes('vessel:cask'))
   )
-    board.marks.castsWithoutSize = true;
+    board.marks.casksWithoutSize = true;
 }
 
 /** More figures than one reading can hold; own threshold, so that no text takes long. */

@@ -97,8 +97,6 @@ export interface Marks {
   unnamedSolution?: true;
   /** A small plain tablet, whose salt and size may be missing. */
   campden?: true;
-  /** An effervescent tablet whose size was not said. */
-  tabletsOfUnknownSize?: true;
   /** The word `salt` stood beside a bisulfite strength. */
   strengthAsSalt?: true;
   /** The amount stood in spoons. */
@@ -116,10 +114,8 @@ export interface Marks {
   fruitByWeight?: true;
   /** An amount stood per weight of fruit (`7 g per 100 kg`). */
   fruitRate?: true;
-  /** The person wants to stop a fermentation. */
-  stopsFerment?: true;
   /** A cask without a usual size was named. */
-  castsWithoutSize?: true;
+  casksWithoutSize?: true;
   solutionUse?: 'holding' | 'cleaning' | 'make-up';
   /** The first line of the round said that all this was added. */
   pastLine?: true;

@@ -1,3 +1,4 @@
+import { MG_L_IN } from '../../core/units/concentration.ts';
 import type { Board } from './board.ts';
 import { hasTag, isMark } from './board.ts';
 import type { UnitId } from './words/words.ts';
@@ -43,9 +44,4 @@ export function concentrationAt(board: Board, i: number): UnitAt | undefined {
 }
 
 /** How many mg/L one of that concentration is. */
-export const mg_L_IN: Readonly<Partial<Record<UnitId, number>>> = {
-  ppm: 1,
-  'mg/L': 1,
-  'g/hL': 10,
-  'g/L': 1000,
-};
+export const mg_L_IN: Readonly<Partial<Record<UnitId, number>>> = MG_L_IN;

@@ -95,7 +95,7 @@ function findCounted(board: Board, i: number): boolean {
     return keep(board, count, size.volume_L, from, each);
   }
   if (!isBarrel(board, i + 1)) {
-    board.marks.castsWithoutSize = true;
+    board.marks.casksWithoutSize = true;
     claim(board, from, i + 1);
     return true;
   }
@@ -160,7 +160,7 @@ export function findBarrels(board: Board): void {
         if (!size && board.marks.barrelsAssumed_L === undefined && !termAt(board, i).text.endsWith('s'))
           board.marks.barrelsAssumed_L = USUAL_BARREL_L;
       }
-      if (hasTag(board, i, 'vessel:cask')) board.marks.castsWithoutSize = true;
+      if (hasTag(board, i, 'vessel:cask')) board.marks.casksWithoutSize = true;
     }
   }
 }

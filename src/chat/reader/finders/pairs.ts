@@ -1,15 +1,5 @@
 import type { Board } from '../board.ts';
-import {
-  decimalAt,
-  figureAt,
-  find,
-  hasTag,
-  isFound,
-  isFree,
-  isMark,
-  refuse,
-  setAside,
-} from '../board.ts';
+import { decimalAt, figureAt, find, hasTag, isFound, isFree, isMark, refuse, setAside } from '../board.ts';
 import { strangerBefore } from '../stranger.ts';
 import { isPhLike } from '../ph-like.ts';
 import { concentrationAt } from '../units.ts';

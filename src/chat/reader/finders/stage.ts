@@ -62,7 +62,6 @@ export function findStage(board: Board): void {
     if (termAt(board, i).kind !== 'word' || board.taken[i] === true) continue;
     if (isCue(board, i, 'past-ferment')) claim(board, i, i);
     else if (stopsFerment(board, i)) {
-      board.marks.stopsFerment = true;
       board.notes.push({ id: 'ferment-stop', text: '' });
       find(board, 'stage', 'fermenting', 'labelled', i, i);
     } else if (isCue(board, i, 'ml') && !isUnit(board, i)) {

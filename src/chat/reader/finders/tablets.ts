@@ -66,6 +66,7 @@ function findCampden(board: Board, i: number): void {
   claim(board, i, i);
   if (size && size.mass_g > 0 && size.mass_g <= LARGEST_PLAIN_TABLET_g)
     find(board, 'tablet_salt_g', size.mass_g, 'unit', size.from, size.to);
+  else if (size) refuse(board, 'ambiguous-number', size.from, size.to);
   const apart = board.terms.findIndex(
     (_, k) => isCue(board, k, 'tablet') && countBefore(board, k - 1) !== undefined,
   );
@@ -81,7 +82,6 @@ function findEffervescent(board: Board, i: number): void {
   for (const k of [i - 1, i + 1])
     if (isCue(board, k, 'effervescent') || hasTag(board, k, 'label:so2')) claim(board, k, k);
   if (size) find(board, 'tablet_SO2_g', size.mass_g, 'unit', size.from, size.to);
-  else board.marks.tabletsOfUnknownSize = true;
   if (count === undefined) return;
   const tablets = figureAt(board, count).value;
   if (size) find(board, 'mass_g', tablets * size.mass_g, 'unit', count, count);

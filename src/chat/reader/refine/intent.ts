@@ -12,7 +12,7 @@ const hasAmount = (board: Board): boolean =>
 const hasVolume = (board: Board): boolean =>
   any(board, 'volume_L') ||
   board.marks.barrelsAssumed_L !== undefined ||
-  board.marks.castsWithoutSize === true;
+  board.marks.casksWithoutSize === true;
 const hasAdditive = (board: Board): boolean =>
   any(board, 'additive') || board.marks.unnamedAdditive === true || board.marks.campden === true;
 const hasVessel = (board: Board): boolean => any(board, 'vessel', 'vessels');
@@ -114,7 +114,7 @@ function isDose(board: Board): boolean {
     any(board, 'volume_L') ||
     board.marks.barrelsCounted === true ||
     board.marks.fruitByWeight === true ||
-    (board.marks.castsWithoutSize === true && any(board, 'stage', 'style'))
+    (board.marks.casksWithoutSize === true && any(board, 'stage', 'style'))
   )
     return !moves;
   if (asksForDose(board)) return true;

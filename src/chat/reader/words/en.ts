@@ -291,10 +291,6 @@ export const en: Words = {
       'wash', 'dash', 'run', 'tell', 'put', 'use', 'know', 'measure', 'pick', 'work',
     ],
     'cue:pronoun': ['i', 'we', 'you', 'he', 'she', 'they', 'it', 'that', 'this', 'who', 'there', 'one', 'a'],
-    'cue:time-before': [
-      'at', 'by', 'until', 'till', 'before', 'after', 'since', 'from', 'around', 'back at', 'sampled',
-      'sampled at', 'taken at', 'comes at', 'opens at', 'closes at',
-    ],
     'cue:month': [
       'jan', 'feb', 'mar', 'apr', 'jun', 'jul', 'aug', 'sep', 'sept', 'oct', 'nov', 'dec', 'january',
       'february', 'march', 'april', 'june', 'july', 'august', 'september', 'october', 'november', 'december',
@@ -353,7 +349,6 @@ export const en: Words = {
     'cue:buy': ['order', 'buy', 'bought', 'ordered', 'invoice', 'invoiced', 'delivered', 'delivery', 'purchase', 'received', 'ship', 'shipped'],
     'cue:lately': ['dropped from', 'fell from', 'went from', 'down from', 'came down from', 'gone from', 'has gone from'],
     'cue:share-word': ['off', 'of', 'new', 'more', 'less', 'extra', 'bigger', 'smaller', 'loss', 'fraction', 'discount', 'blend', 'topping', 'press', 'over', 'under', 'headspace', 'ullage', 'stems', 'higher', 'lower', 'up', 'down'],
-    'cue:clothes-size': ['size', 'sizes'],
     'cue:greeting': [
       'hi', 'hello', 'hey', 'good morning', 'morning', 'good afternoon', 'good evening', 'evening', 'yo',
       'hiya', 'howdy', 'gday', "g'day", 'hallo', 'hi there', 'hey there', 'greetings', 'afternoon', 'sup',

@@ -18,17 +18,17 @@ export type AdditiveWord =
 
 /** Small words that steer the reading. */
 export type CueId =
-  | 'target' | 'to' | 'from' | 'raise' | 'up' | 'add' | 'need' | 'addition' | 'molecular' | 'by'
+  | 'target' | 'to' | 'from' | 'raise' | 'add' | 'need' | 'addition' | 'molecular' | 'by'
   | 'binds' | 'binding' | 'no-binding' | 'extra' | 'third' | 'half' | 'quarter' | 'two-thirds' | 'three-quarters'
   | 'each' | 'altogether' | 'per' | 'in' | 'of' | 'with' | 'is' | 'and' | 'article' | 'correction'
   | 'past' | 'if' | 'not' | 'not-yet' | 'question' | 'how-much' | 'reading' | 'vessel-statement'
-  | 'water' | 'holding' | 'cleaning' | 'make-up' | 'solution' | 'salt-word' | 'powder' | 'gas' | 'fill' | 'size'
+  | 'water' | 'holding' | 'cleaning' | 'make-up' | 'solution' | 'salt-word' | 'powder' | 'gas' | 'size'
   | 'thousand' | 'number-word' | 'number-sign' | 'bottle-unit' | 'tablet' | 'sachet' | 'effervescent' | 'joined'
   | 'ml' | 'ml-around' | 'ml-over' | 'ml-without' | 'ml-bugs' | 'over' | 'stop' | 'ferment' | 'past-ferment'
-  | 'fruit' | 'wine' | 'verb' | 'pronoun' | 'time-before' | 'month' | 'lot' | 'variety'
+  | 'fruit' | 'wine' | 'verb' | 'pronoun' | 'month' | 'lot' | 'variety'
   | 'greeting' | 'thanks' | 'help' | 'cellar' | 'plain' | 'potassium' | 'sodium' | 'yet'
   | 'percent' | 'please' | 'in-store' | 'into' | 'clock-before' | 'no' | 'states' | 'plus' | 'times' | 'wick'
-  | 'should' | 'share-word' | 'clothes-size' | 'limit' | 'sample-word' | 'past-time' | 'put' | 'lately' | 'bag' | 'buy' | 'in-water-name' | 'solution-name' | 'per-barrel' | 'rises-too' | 'tap-too'; // prettier-ignore
+  | 'should' | 'share-word' | 'limit' | 'sample-word' | 'past-time' | 'put' | 'lately' | 'bag' | 'buy' | 'in-water-name' | 'solution-name' | 'per-barrel' | 'rises-too' | 'tap-too'; // prettier-ignore
 
 /** What a word is. */
 export type Tag =
