@@ -293,6 +293,7 @@ note-strength-as-salt = the strength is grams of the salt in 100 mL; as SO2 it w
 note-strength-as-SO2 = the strength is grams of SO2 in 100 mL
 note-mass-beside-readings = “{ $text }” is grams, not gallons
 note-each-or-total = “{ $text }” is of each
+note-unread-words = I read English so far, and passed over: { $text }
 set-aside-figure = { $text }
 
 ## The one question
@@ -409,7 +410,7 @@ warning-stage-not-over =
 warning-additive-not-permitted =
     { $additive ->
         [ammonium-bisulfite-solution] ⚠ Ammonium bisulfite is for grapes and must only (OIV): not for this wine; ask first.
-       *[sodium] ⚠ Sodium metabisulfite: many rules bar it from wine (OIV; EU, UK from memory). Ask first.
+       *[sodium] ⚠ Sodium metabisulfite: many rules bar it from wine (OIV; EU and UK unconfirmed). Ask first.
     }
 warning-total-over-limit =
     { $total ->

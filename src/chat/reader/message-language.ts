@@ -6,7 +6,7 @@ import type { Language } from './understood.ts';
 const GROUPS = new Map<Language, string>(ALL_WORDS.map(({ language, groups }) => [language, groups]));
 
 /** Words that are the same in most languages and tell none. */
-const INTERNATIONAL = new Set(['libre', 'livre', 'libera', 'libero', 'frei', 'freie', 'freies', 'totale', 'gesamt', 'ppm', 'kmbs', 'so2', 'tank', 'total', 'bio', 'organic', 'merlot', 'mol', 'lot', 'vol', 'alc', 'dep', 'cuve', 'vasca', 'cuba', 'deposito', 'barrique', 'barrica']); // prettier-ignore
+const INTERNATIONAL = new Set(['so2l', 'so2t', 'libre', 'livre', 'libera', 'libero', 'frei', 'freie', 'freies', 'totale', 'gesamt', 'ppm', 'kmbs', 'so2', 'tank', 'total', 'bio', 'organic', 'merlot', 'mol', 'lot', 'vol', 'alc', 'dep', 'cuve', 'vasca', 'cuba', 'deposito', 'barrique', 'barrica']); // prettier-ignore
 
 const tellsEnglish = ({ kind, text, tags }: Term): boolean =>
   kind === 'word' &&
@@ -17,6 +17,10 @@ const tellsEnglish = ({ kind, text, tags }: Term): boolean =>
 
 const isForeign = ({ kind, text, tags }: Term): boolean =>
   kind === 'word' && text.length >= 3 && tags.length === 0;
+
+/** Whether the words of a message are of a language that is not read yet, so that something may be passed over. */
+export const isForeignTalk = (terms: readonly Term[], chat: Language): boolean =>
+  terms.some(isForeign) && (chat !== 'en' || !terms.some(tellsEnglish));
 
 /**
  * Which separators group thousands: only those that the chat's and the message's language agree on.

@@ -32,6 +32,8 @@ import { settleBounds } from './refine/bounds.ts';
 import { settleConflicts } from './refine/conflicts.ts';
 import { decideIntent } from './refine/intent.ts';
 import { readUnlabelled } from './refine/unlabelled.ts';
+import { isForeignTalk } from './message-language.ts';
+import { isStranger } from './stranger.ts';
 import type { Draft, FieldName, Fields, Place } from './understood.ts';
 
 /** From the most certain to the least: what one has claimed, no later one reads. */
@@ -152,6 +154,13 @@ const tooManyFigures = (board: Board): Draft => ({
   where: {},
 });
 
+/** Words of another language beside a reading: what they said is not in it, and that has to be told. */
+function noteUnread(board: Board, intent: Draft['intent']): void {
+  if (intent === 'chat' || !isForeignTalk(board.terms, board.settings.language)) return;
+  const unread = board.terms.flatMap((_, i) => (isStranger(board, i) ? [placeOf(board, i, i).text] : []));
+  if (unread.length > 0) board.notes.push({ id: 'unread-words', text: unread.slice(0, 6).join(', ') });
+}
+
 /**
  * Runs every finder and refiner over a board, and says what the message wants.
  *
@@ -167,6 +176,7 @@ export function readDraft(board: Board): Draft {
   if (intent === 'dose' && isFound(board, 'mass_g'))
     board.notes.push({ id: 'mass-beside-readings', text: '' });
   if (board.marks.fruitByWeight) board.notes.push({ id: 'fruit-by-weight', text: '' });
+  noteUnread(board, intent);
   const { strengthAsSalt, volumeUnit, containers, concentrationUnit } = board.marks;
   return {
     intent,

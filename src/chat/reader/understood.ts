@@ -82,6 +82,7 @@ export interface ReadNote {
     | 'spoon' // an amount in spoons
     | 'negated' // something was said not to have been added
     | 'each-or-total' // one volume beside several vessels
+    | 'unread-words' // words of a language that is not read yet
     | 'did-you-mean'; // a word one letter from an additive
   readonly text: string;
 }

@@ -178,6 +178,7 @@ export interface SentenceValues {
   'note-round-ph': never;
   'note-strength-as-SO2': never;
   'note-strength-as-salt': 'factor';
+  'note-unread-words': 'text';
   'note-volume-sum': 'text';
   'nothing-why': 'free' | 'kind' | 'molecular' | 'ph' | 'value';
   'nothing-why-free': 'free' | 'kind' | 'value';

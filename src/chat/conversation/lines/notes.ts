@@ -14,6 +14,7 @@ const AMONG_THE_ASSUMED = [
   'strength-as-SO2',
   'mass-beside-readings',
   'each-or-total',
+  'unread-words',
 ] as const satisfies readonly ReadNote['id'][];
 
 /** How many times as much SO2 the strength would be, were it of SO2 and not of the salt. */

@@ -39,7 +39,9 @@ function symbolStart(board: Board, i: number): number | undefined {
   const at = joined ? i - 2 : i - 1;
   const symbol = board.terms[at];
   if (symbol?.kind !== 'word' || !symbol.capital) return undefined;
-  const isOxygen = symbol.text === 'do';
+  // Total acidity, in French, Spanish, Italian and Portuguese cellars.
+  const isAcidity = symbol.text === 'at' && board.settings.language !== 'en';
+  const isOxygen = symbol.text === 'do' || isAcidity;
   const isMetal =
     /^(k|na|ca|mg|fe|cu)$/.test(symbol.text) && (at < i - 1 || concentrationAt(board, i + 1) !== undefined);
   return isOxygen || isMetal ? at : undefined;

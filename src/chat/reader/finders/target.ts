@@ -21,7 +21,8 @@ function isClear(board: Board, i: number, { aim, label }: { aim: Aim; label?: Ai
   if (aim.kind !== undefined || label !== undefined || concentrationAt(board, aim.from + 1)) return true;
   const after = aim.to + 1;
   if (isStranger(board, after) || (isCue(board, after, 'from') && !isFree(board, after + 1))) return false;
-  return isCellarTalk(board) && !isOtherVerb(board, i);
+  const isTerse = board.terms.length <= 4 && !board.terms.some((_, k) => isStranger(board, k));
+  return (isTerse || isCellarTalk(board)) && !isOtherVerb(board, i);
 }
 
 /** `chill to 30`, `TA up 1.5`, `drop pH to 3.5`: the figure belongs to what stands before the verb. */

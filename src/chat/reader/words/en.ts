@@ -53,10 +53,10 @@ export const en: Words = {
     'label:free': [
       'free', 'fre', 'freee', 'frre', 'fee so2', 'fso2', 'f so2', 'fs02', 'free so2', 'free so', 'so2 free',
       'free sulfur', 'free sulphur', 'free sulfur dioxide', 'free sulphur dioxide', 'free sulfite',
-      'free sulphite', 'fso', 'freeso2', 'free s02', 'f s02', 'fr', 'fr so2', 'libre', 'livre', 'libera', 'libero', 'frei', 'freie', 'freies', 'so2 libre', 'so2 livre', 'so2 libera', 'freies so2', 'freie so2'],
+      'free sulphite', 'fso', 'freeso2', 'free s02', 'f s02', 'fr', 'fr so2', 'libre', 'livre', 'libera', 'libero', 'frei', 'freie', 'freies', 'so2 libre', 'so2 livre', 'so2 libera', 'freies so2', 'freie so2', 'so2l'],
     'label:total': [
       'total', 'totl', 'totla', 'toal', 'tot', 'tso2', 't so2', 'ts02', 'total so2', 'so2 total', 'tot so2',
-      'total sulfur', 'total sulphur', 'total sulfur dioxide', 'total sulphur dioxide', 'totals', 'total s02', 'totale', 'gesamt', 'gesamt so2', 'so2 totale', 'gesamtes so2'],
+      'total sulfur', 'total sulphur', 'total sulfur dioxide', 'total sulphur dioxide', 'totals', 'total s02', 'totale', 'gesamt', 'gesamt so2', 'so2 totale', 'gesamtes so2', 'so2t'],
     'label:so2': ['so2', 's02', 'sulfur dioxide', 'sulphur dioxide', 'so 2'],
     'label:temperature': ['temp', 'temps', 'tmp', 'temperature', 'wine temp'],
     'label:alcohol': ['alc', 'abv', 'alcohol', 'etoh', 'ethanol', 'alc vol', 'vol alc'],
