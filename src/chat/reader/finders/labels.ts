@@ -9,9 +9,7 @@ import { keepFigure } from './keep-labelled.ts';
 
 function isRangeAt(board: Board, { at, to }: Beside): number | undefined {
   const joins =
-    isMark(board, to + 1, '-') &&
-    !(termAt(board, to + 1).gap && board.terms[to + 2]?.gap === true) &&
-    board.terms[to + 2]?.gap !== true;
+    isMark(board, to + 1, '-') && !termAt(board, to + 1).gap && board.terms[to + 2]?.gap === false;
   return joins && isFree(board, to + 2) && !hasForeignUnit(board, to + 2) && isMark(board, at + 1, '-')
     ? to + 2
     : undefined;

@@ -20,7 +20,26 @@ export const mayBeGallons = (board: Board, i: number): boolean => {
   return term?.text === 'g' && isCue(board, i + 1, 'of') && isCue(board, i + 2, 'wine');
 };
 
-const isFruit = (board: Board, i: number): boolean => isCue(board, skipsTo(board, i), 'fruit');
+/** Whether a weight is of fruit: fruit, a grape or must stands behind it, or fruit before it. */
+function isOfFruit(board: Board, from: number, to: number, unit: UnitId): boolean {
+  const next = skipsTo(board, to + 1);
+  if (unit === 'ton' || unit === 'quintal' || isCue(board, next, 'fruit') || isCue(board, from - 1, 'fruit'))
+    return true;
+  return unit !== 'g' && (isCue(board, next, 'variety') || hasTag(board, next, 'stage:must'));
+}
+
+/** `2 t grapes`: the t of a ton, which elsewhere is a tank's. */
+function findTons(board: Board, i: number): boolean {
+  const next = board.terms[i + 1];
+  const behind = skipsTo(board, i + 2);
+  const isTon =
+    next?.text === 't' &&
+    (isCue(board, behind, 'fruit') || isCue(board, behind, 'variety') || hasTag(board, behind, 'stage:must'));
+  if (!isTon) return false;
+  board.marks.fruitByWeight = true;
+  claim(board, i, i + 1);
+  return true;
+}
 
 /** `1 lb 4 oz` is one mass. */
 function ouncesAfter(board: Board, i: number): { mass_g: number; to: number } | undefined {
@@ -29,18 +48,14 @@ function ouncesAfter(board: Board, i: number): { mass_g: number; to: number } | 
 }
 
 function findMassAt(board: Board, i: number): void {
+  if (findTons(board, i)) return;
   const unit = unitAt(board, i + 1, MASS_UNITS);
   if (!unit || concentrationAt(board, i + 1)) return;
   const { value, from } = figureAt(board, i);
   if (unit.id === 'mg' && !board.terms[unit.to + 1]?.tags.some((tag) => tag.startsWith('additive'))) return;
   if (mayBeGallons(board, unit.to) || isThreeDigits(termAt(board, i).text) || Number.isNaN(value))
     return refuse(board, 'ambiguous-number', i, unit.to);
-  if (
-    isFruit(board, unit.to + 1) ||
-    unit.id === 'ton' ||
-    unit.id === 'quintal' ||
-    (unit.id !== 'g' && hasTag(board, skipsTo(board, unit.to + 1), 'stage:must'))
-  ) {
+  if (isOfFruit(board, from, unit.to, unit.id)) {
     board.marks.fruitByWeight = true;
     return claim(board, from, unit.to);
   }

@@ -28,7 +28,7 @@ function countEnd(board: Board, i: number): number | undefined {
 function countedEnd(board: Board, i: number): number | undefined {
   const next = board.terms[i + 1];
   if (next?.kind !== 'word') return undefined;
-  if (next.text === 't' && (isMark(board, i + 2, '/') || isCue(board, i + 2, 'of'))) return i + 3;
+  if (next.text === 't' && isMark(board, i + 2, '/')) return i + 3;
   if (isCue(board, i + 1, 'bottle-unit') || isCue(board, i + 1, 'bag')) return i + 1;
   return isCue(board, i + 1, 'in') && next.text === 'in' && isStranger(board, i + 2) ? i + 2 : undefined;
 }

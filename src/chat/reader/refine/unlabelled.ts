@@ -77,7 +77,7 @@ function findPh(board: Board, candidates: readonly number[]): void {
     board.findings.every(({ field }) => field === 'vessel' || field === 'stage' || field === 'style')
   )
     return setAside(board, i, i);
-  if (isAfterInto(board, i) || isTimeLike(board, i)) return refuse(board, 'ambiguous-number', i, i);
+  if (isAfterInto(board, i)) return refuse(board, 'ambiguous-number', i, i);
   board.notes.push({ id: 'ph-unlabelled', text: placeOf(board, i, i).text });
   find(board, 'ph', decimalAt(board, i).value, 'bare', i, i);
 }

@@ -310,8 +310,7 @@ export const en: Words = {
       'cf', 'petit verdot', 'gruner', 'vermentino', 'carmenere', 'pinotage', 'rkatsiteli', 'saperavi',
       'touriga', 'verdelho', 'marsanne', 'roussanne', 'mencia', 'godello', 'graciano', 'bobal', 'monastrell',
       'cinsault', 'dolcetto', 'primitivo', 'aglianico', 'fiano', 'trebbiano', 'glera', 'vidal', 'seyval',
-      'norton', 'traminette', 'concord', 'chambourcin', 'cuvee',
-    ],
+      'norton', 'traminette', 'concord', 'chambourcin', 'cuvee', 'zinf', 'zins', 'chards', 'cabs', 'merlots', 'sauv b', 'pinots', 'grigio', 'gris', 'noir', 'cabernets', 'petit sirah', 'mouv', 'grenaches'],
     'cue:potassium': ['potassium', 'pot', 'k'],
     'cue:sodium': ['sodium', 'na'],
     'cue:yet': ['yet'],
@@ -388,7 +387,7 @@ export const en: Words = {
       'recipe', 'based', 'cellar', 'crew', 'where', 'full', 'stock', 'bring', 'out', 'up', 'onto', 'gently',
       'back', 'off', 'split', 'between', 'came', 'they', 'he', 'she', 'them', 'last', 'night', 'week',
       'monday', 'tuesday', 'wednesday', 'thursday', 'friday', 'saturday', 'sunday', 'early', 'earlier', 'late',
-      'shift', 'first', 'second', 'third', 'next', 'crush pad', 'before crush', 'after crush', 'crush starts'],
+      'shift', 'first', 'second', 'third', 'next', 'crush pad', 'before crush', 'after crush', 'crush starts', 'round', 'rounds', 'list', 'todays', "today's"],
     'vessel:tank': [
       'tank', 'tnk', 'tk', 'tq', 'tanks', 'tks', 'vat', 'cuve', 'cuba', 'vasca', 'deposito', 'dep', 'tanque',
       'pileta', 'serbatoio', 'autoclave', 'cuves', 'tanl', 'takn', 'tamk', 'tanck', 'depositos', 'tanques',
