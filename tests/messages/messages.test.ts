@@ -4,6 +4,8 @@ import { judge, labelledIn } from './judge.ts';
 for (const file of [
   'en.jsonl',
   'en-more.jsonl',
+  'en-hard.jsonl',
+  'en-floor.jsonl',
   'en-words.jsonl',
   'en-marks.jsonl',
   'refused.en.jsonl',

@@ -31,6 +31,7 @@ export function findKind(board: Board): void {
     const category = CATEGORIES.find((one) => hasTag(board, i, `category:${one}`));
     const product = PRODUCTS.find((one) => hasTag(board, i, `product:${one}`));
     if (style && isStranger(board, i + 1)) continue;
+    if (product && isStranger(board, i + 1)) continue;
     if (category && (isStranger(board, i - 1) || isStranger(board, i + 1) || isThanks(board, i))) continue;
     if (style) find(board, 'style', style, 'labelled', i, i);
     else if (category) find(board, 'category', category, 'labelled', i, i);

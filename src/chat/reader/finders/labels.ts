@@ -35,6 +35,12 @@ const isLimit = (board: Board, i: number, { at, to }: Beside): boolean =>
   [Math.min(i, at) - 1, Math.max(i, to) + 1].some((k) => isCue(board, k, 'limit')) ||
   (at > i + 1 && isCue(board, i + 1, 'limit'));
 
+/** `total of 18 people`, `free 20 min`: a count or a time. */
+const isCounted = (board: Board, label: LabelId, { at }: Beside): boolean =>
+  (label === 'free' || label === 'total') &&
+  hasTag(board, at + 1, 'unit:none-of-ours') &&
+  !hasTag(board, at + 1, 'label:aside');
+
 /** `are you free at 3`: the word alone, in a message that speaks of no wine. */
 function isSmallTalk(board: Board, label: LabelId, { at }: Beside): boolean {
   if ((label !== 'free' && label !== 'total') || concentrationAt(board, at + 1) || board.terms.length <= 3)
@@ -71,8 +77,7 @@ function findLabel(board: Board, i: number, label: LabelId): void {
   const [from, to] = [Math.min(i, figureAt(board, beside.at).from), Math.max(i, beside.to)];
   if (isCue(board, i - 1, 'not') && beside.at > i) return refuse(board, 'ambiguous-number', i - 1, to);
   if (isLimit(board, i, beside)) return setAside(board, from, to);
-  if (hasTag(board, beside.at + 1, 'unit:none-of-ours'))
-    return setAside(board, from, Math.max(to, beside.at + 1));
+  if (isCounted(board, label, beside)) return setAside(board, from, Math.max(to, beside.at + 1));
   if (isSmallTalk(board, label, beside)) return;
   if (hasForeignUnit(board, beside.at)) {
     if (label !== 'volume' && label !== 'so2') refuse(board, 'unit-mismatch', from, to + 1);

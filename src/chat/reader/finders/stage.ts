@@ -71,7 +71,10 @@ export function findStage(board: Board): void {
     } else {
       const stage = STAGES.find((one) => hasTag(board, i, `stage:${one}`));
       const counted = board.terms[i - 1]?.kind === 'number' && hasTag(board, i, 'vessel:cask');
-      if (stage && !counted && !(stage === 'must' && !isNounMust(board, i)))
+      const yetToCome =
+        stage === 'bottled' &&
+        (['not-yet', 'should', 'verb'] as const).some((cue) => isCue(board, i - 1, cue));
+      if (stage && !yetToCome && !counted && !(stage === 'must' && !isNounMust(board, i)))
         find(board, 'stage', stage, 'labelled', i, i);
     }
   }
