@@ -18,6 +18,8 @@ export interface Lexicon {
   readonly formulas: ReadonlyMap<string, readonly string[]>;
   /** Long words that a slip of one letter may be mended to, by first letter. */
   readonly mendable: ReadonlyMap<string, readonly string[]>;
+  /** Words that are never taken for a slip of another. */
+  readonly neverMended: ReadonlySet<string>;
 }
 
 const MENDABLE =
@@ -67,6 +69,7 @@ export function buildLexicon(lists: readonly Words[]): Lexicon {
     longest,
     formulas,
     mendable,
+    neverMended: new Set(lists.flatMap(({ neverMended = [] }) => neverMended)),
   };
 }
 

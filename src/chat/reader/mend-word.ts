@@ -1,18 +1,5 @@
 import type { Lexicon } from './lexicon.ts';
 
-/** Ordinary words, and chemicals of another kind, that are one letter from a cellar word and none. */
-const NEVER = new Set([
-  'metabisulfide', 'metabisulphide', 'bisulfide', 'libre', 'livre', 'libra', 'livres', 'libres',
-  'while', 'write', 'bottle', 'gallop', 'sugary', 'adder', 'tanks', 'thanks', 'carrel', 'quarrel', 'liter', 'latter',
-  'later', 'letter', 'lighter', 'volumes', 'tempo', 'tempt', 'temple', 'targe', 'barrelled', 'sugared', 'bonding',
-  'blinding', 'winding', 'finding', 'minding', 'sulfide', 'sulphide', 'sulfate', 'sulphate', 'bisulfide', 'metabisulfate',
-  'metabisulphate', 'bisulfate', 'bisulphate', 'disulfide', 'sulfone', 'sulfonate', 'organics', 'organist', 'organise',
-  'organize', 'parkling', 'darkling', 'butler', 'butter', 'batts', 'pupil', 'pints', 'pines', 'coasts', 'casts', 'tasks', 'masks',
-  'cakes', 'caves', 'cases', 'cash', 'cooking', 'totally', 'tonal', 'dental', 'petal', 'local', 'vocal', 'legal', 'royal',
-  'mortal', 'metal', 'portal', 'tidal', 'moral', 'loyal', 'totes', 'notes', 'votes', 'drums', 'drugs', 'bucket', 'packet',
-  'barley', 'barren', 'barred', 'parcel', 'forties', 'fortify', 'citrus', 'cirrus', 'copper', 'cooper', 'hopper', 'chopper', 'topper',
-]); // prettier-ignore
-
 /** Whether two words are one slip apart: a letter too many, too few, another, or two changed round. */
 function isOneSlip(a: string, b: string): boolean {
   if (Math.abs(a.length - b.length) > 1) return false;
@@ -48,7 +35,8 @@ const isSwapped = (a: string, b: string): boolean =>
  * ```
  */
 export function mendWord(word: string, lexicon: Lexicon): string | undefined {
-  if (word.length < 4 || word.length > 24 || NEVER.has(word) || lexicon.phrases.has(word)) return undefined;
+  if (word.length < 4 || word.length > 24 || lexicon.neverMended.has(word) || lexicon.phrases.has(word))
+    return undefined;
   let found: string | undefined;
   for (const candidate of lexicon.mendable.get(word[0] ?? '') ?? []) {
     if (

@@ -60,5 +60,7 @@ export interface Words {
   /** The separator that groups thousands in this language; empty where only a blank does. */
   readonly groups: '.' | ',' | '';
   readonly says: Readonly<Partial<Record<Tag, readonly string[]>>>;
+  /** Ordinary words, other chemicals and words of other languages that are one letter from a cellar word and none. */
+  readonly neverMended?: readonly string[];
   readonly danger: Readonly<Partial<Record<DangerId, readonly string[]>>>;
 }
