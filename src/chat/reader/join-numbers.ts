@@ -178,5 +178,15 @@ function joinBlankGroups(terms: readonly Term[]): Term[] {
  * ```
  */
 export function joinNumbers(terms: readonly Term[]): Term[] {
-  return joinBlankGroups(joinFractions(terms));
+  const joined: Term[] = [];
+  let line: Term[] = [];
+  // Line by line: what the next tank's line holds says nothing of this one's figures.
+  for (const term of joinFractions(terms)) {
+    if (term.kind !== 'break') line.push(term);
+    else {
+      joined.push(...joinBlankGroups(line), term);
+      line = [];
+    }
+  }
+  return [...joined, ...joinBlankGroups(line)];
 }

@@ -86,12 +86,17 @@ function withShared(draft: Draft, shared: Draft | undefined): Draft {
   return { ...draft, intent, marks: { ...shared?.marks, ...draft.marks } };
 }
 
+/** `total 2100 gal` under a round: the sum of its tanks, and no tank's volume. */
+const isSum = ({ terms, hasVolume }: LineRead): boolean =>
+  hasVolume && termIn(terms, 0).tags.includes('label:total');
+
 /** The lines of each reading: one that opens it and those below; an empty one for figures nobody can read. */
 function groupsOf(lines: readonly LineRead[], opens: (line: LineRead) => boolean): LineRead[][] {
   const groups: LineRead[][] = [];
   for (const [i, line] of lines.entries()) {
     const last = groups.at(-1);
     if (opens(line)) groups.push([line]);
+    else if (isSum(line)) continue;
     else if (i > 0 && line.draft.intent !== 'chat' && last && last.length > 0) last.push(line);
     else if (i > 0 && line.leftover) groups.push([]);
   }

@@ -25,6 +25,10 @@ const NEVER: readonly (readonly [string, string, unknown])[] = [
   ['molecular is 0.4 T4 20 hl', 'target', { molecular_mg_L: 0.4 }],
   ['pH 3.5 to 3.6 T4 20 hl free 12', 'target', { free_mg_L: 3.6 }],
   ['tank 4 in 20 minutes', 'free_mg_L', 20],
+  ['barrels 1-6 3.6 20 225 L each\nbarrels 7-12 3.7 18 225 L each', 'volume_L', 121350],
+  ['T1 3.6 20 225 L\nT2 3.5 18 900 L', 'volume_L', 20225],
+  ['T1 20 hl 3.6 20\nT2 30 hl 3.7 18\ntotal 50 hl', 'volume_L', 5000],
+  ['T8 free 20 -> 35 950 gal', 'volume_L', 35950 * 3.785411784],
   ['12° T4 20 hl pH 3.5 free 12', 'temperature_C', 12],
 ];
 

@@ -70,7 +70,13 @@ function findLabel(board: Board, i: number, label: LabelId): void {
   }
   if (!beside) {
     if (label === 'total' && isCue(board, i + 1, 'of')) return;
-    if (volumeTaken !== undefined && label !== 'so2' && label !== 'volume' && label !== 'sugar')
+    if (
+      volumeTaken !== undefined &&
+      label !== 'so2' &&
+      label !== 'total' &&
+      label !== 'volume' &&
+      label !== 'sugar'
+    )
       mismatch(board, i, volumeTaken);
     return;
   }
