@@ -97,12 +97,23 @@ function isClaimedBefore(terms: readonly Term[], i: number): boolean {
   return k >= 0 && has(terms[k], CLAIMS_NEXT) && !hasOwnFigure(terms, k);
 }
 
+/** `18/60 800 gal`, `18 / 60 800 gal`: the second of a pair. A stroke behind a labelled figure only parts fields. */
+function isBehindSlash(terms: readonly Term[], i: number): boolean {
+  const slash = termIn(terms, i - 1);
+  if (slash.text !== '/') return false;
+  return !slash.gap || (terms[i - 2]?.kind === 'number' && !isClaimedBefore(terms, i - 3));
+}
+
 /** `T8 900 gal`: the 8 is the vessel's, or the label's that it is glued to. */
 const isGluedToWord = (terms: readonly Term[], i: number): boolean =>
   (termIn(terms, i).gap === false &&
     (terms[i - 1]?.kind === 'word' || (terms[i - 1]?.text === '-' && termIn(terms, i - 1).gap === false))) ||
-  terms[i - 1]?.text === '/' ||
-  (terms[i - 1]?.text === '.' && terms[i - 1]?.gap === false);
+  isBehindSlash(terms, i) ||
+  // `pH 3. 61`: a blank inside a decimal.
+  (terms[i - 1]?.text === '.' &&
+    terms[i - 1]?.gap === false &&
+    /^[2-4]$/.test(termIn(terms, i - 2).text) &&
+    termIn(terms, i).text.length === 2);
 
 const unitFollows = (terms: readonly Term[], i: number): boolean =>
   has(terms[i], /^unit:(L|hL|m3|gal|galUS|galUK|mL|g|kg|lb)$/) || has(terms[i], /^cue:thousand$/);
@@ -178,15 +189,15 @@ function joinBlankGroups(terms: readonly Term[]): Term[] {
  * ```
  */
 export function joinNumbers(terms: readonly Term[]): Term[] {
-  const joined: Term[] = [];
+  const out: Term[] = [];
   let line: Term[] = [];
   // Line by line: what the next tank's line holds says nothing of this one's figures.
   for (const term of joinFractions(terms)) {
     if (term.kind !== 'break') line.push(term);
     else {
-      joined.push(...joinBlankGroups(line), term);
+      out.push(...joinBlankGroups(line), term);
       line = [];
     }
   }
-  return [...joined, ...joinBlankGroups(line)];
+  return [...out, ...joinBlankGroups(line)];
 }

@@ -68,6 +68,21 @@ function unglue(word: string, lexicon: Lexicon): readonly string[] | undefined {
   return undefined;
 }
 
+/** Letters that a figure is glued to and that name no quantity: `T4` in `T4,18hl`. */
+function isCode(before: Term | undefined, i: number, lexicon: Lexicon): boolean {
+  if (before?.kind !== 'word') return false;
+  const tags = lexicon.phrases.get(before.text)?.tags ?? NONE;
+  if (tags.some((tag) => tag.startsWith('vessel:'))) return true;
+  if (before.end !== i || before.text.length > 4) return false;
+  return !tags.some((tag) => /^(label|cue:(target|to|add|raise|molecular|by|is))/.test(tag));
+}
+
+/** A comma behind the number of a code parts fields and is no decimal mark. */
+function codeEnd(text: string, from: number, to: number): number {
+  const comma = text.indexOf(',', from);
+  return comma < 0 ? to : comma;
+}
+
 /** The pieces before words are looked up. */
 function piecesOf(folded: FoldedText, lexicon: Lexicon): Term[] {
   const { text } = folded;
@@ -97,6 +112,7 @@ function piecesOf(folded: FoldedText, lexicon: Lexicon): Term[] {
       (c === '.' && isDigit(text[i + 1]) && !isDigit(text[i - 1]) && !isLetter(text[i - 1]))
     ) {
       end = c === '.' ? numeralEnd(text, i + 1) : numeralEnd(text, i);
+      if (isCode(pieces.at(-1), i, lexicon)) end = Math.min(end, codeEnd(text, i, end));
       push('number', i, end);
     } else if (VULGAR[c] !== undefined) {
       push('number', i, end, VULGAR[c]);

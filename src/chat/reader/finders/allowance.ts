@@ -42,11 +42,18 @@ function findPercentAt(board: Board, i: number): boolean {
   return true;
 }
 
+/** `1/3`: two whole numbers with nothing but the stroke between. */
+const isFraction = (board: Board, i: number): boolean =>
+  isMark(board, i + 1, '/') &&
+  [i, i + 2].every((k) => isFree(board, k) && /^\d{1,2}$/.test(termAt(board, k).text)) &&
+  !termAt(board, i + 1).gap &&
+  !termAt(board, i + 2).gap;
+
 /** Finds the allowance (`+30%`, `binding 40%`) and the share that binds (`1/3 binds`, `half gets bound`). */
 export function findAllowance(board: Board): void {
   for (let i = 0; i < board.terms.length; i++) {
     if (isCue(board, i, 'no-binding')) find(board, 'binding_allowance_percent', 0, 'labelled', i, i);
-    else if (isFree(board, i) && isMark(board, i + 1, '/') && isFree(board, i + 2)) {
+    else if (isFraction(board, i)) {
       const value = figureAt(board, i).value / figureAt(board, i + 2).value;
       if (value < 1 && findShareAt(board, value, i, i + 2)) i += 2;
     } else if (isFree(board, i)) {

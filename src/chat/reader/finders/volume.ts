@@ -10,6 +10,7 @@ import {
   refuse,
   setAside,
   termAt,
+  labelBefore,
 } from '../board.ts';
 import { litresOf, noteUnit } from './barrels.ts';
 import type { UnitAt } from '../units.ts';
@@ -72,7 +73,9 @@ const isFlow = (board: Board, i: number): boolean =>
 function findVolumeAt(board: Board, i: number): number {
   const volume = volumeAt(board, i);
   if (!volume) return i;
-  if (volume.figure.unsure || Number.isNaN(volume.figure.value)) {
+  // `total 60,950 L` may be a total and a volume, with no blank after the comma.
+  const isGlued = labelBefore(board, i) === i - 1 && /^\d{1,3},\d{3}$/.test(termAt(board, i).text);
+  if (isGlued || volume.figure.unsure || Number.isNaN(volume.figure.value)) {
     refuse(board, 'ambiguous-number', i, volume.unit.to);
     return volume.unit.to;
   }
