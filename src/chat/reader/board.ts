@@ -129,7 +129,7 @@ export function labelBefore(board: Board, i: number): number | undefined {
 export const isLabelled = (board: Board, i: number): boolean => labelBefore(board, i) !== undefined;
 
 /** An arrow, a plus, a verb that takes the figure behind it. */
-const claimsNext = (board: Board, i: number): boolean =>
+export const claimsNext = (board: Board, i: number): boolean =>
   ['->', '=>', '→', '+'].some((mark) => isMark(board, i, mark)) ||
   (['target', 'to', 'add', 'raise', 'by'] as const).some((cue) => isCue(board, i, cue));
 

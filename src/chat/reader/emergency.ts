@@ -86,11 +86,15 @@ const has = (hits: Hits, id: DangerId): boolean => hits.has(id);
 function isThing(hits: Hits, words: readonly string[], { from }: Hit): boolean {
   const isBeside = (at: number): boolean =>
     all(hits, 'beside').some((hit) => hit.from < at && at - hit.from <= 2);
-  const near = (at: number): boolean => at < from && from - at <= 3 && !isBeside(at);
+  const near = (at: number): boolean =>
+    at < from && from - at <= 2 && !words.slice(at, from).some(isStop) && !isBeside(at);
   const person = all(hits, 'person').some((hit) => hit.to < from && from - hit.to <= 3);
-  const vessel = words.some((word, at) => near(at) && /^(t|fv|b)?\d+$/.test(word));
-  return (vessel || all(hits, 'thing').some((hit) => near(hit.from))) && !person;
+  const vessel = words.some((word, at) => near(at) && /^(t|fv|b)\d+$/.test(word));
+  return (vessel || all(hits, 'thing').some((hit) => near(hit.to))) && !person;
 }
+
+/** A comma or a full stop: what stands before it is no subject of what follows. */
+const isStop = (word: string): boolean => /^[,.;!?\n]$/.test(word);
 
 /** A gas and a leak within four words; free and total SO2 are no gas. */
 function isGasLeak(hits: Hits, words: readonly string[]): boolean {
@@ -98,7 +102,7 @@ function isGasLeak(hits: Hits, words: readonly string[]): boolean {
     ({ from }) =>
       !['free', 'total', 'libre', 'livre', 'libera', 'mol', 'molecular'].includes(words[from - 1] ?? ''),
   );
-  return gases.some((gas) => all(hits, 'leak').some((leak) => Math.abs(leak.from - gas.from) <= 5));
+  return gases.some((gas) => all(hits, 'leak').some((leak) => Math.abs(leak.from - gas.from) <= 8));
 }
 
 /** `he dropped a hose, it fell into the tank`: a thing stands between the person and the fall. */
@@ -141,7 +145,8 @@ function dangerOf(hits: Hits, words: readonly string[]): Danger | undefined {
   if (has(hits, 'mixed') && has(hits, 'chemical') && has(hits, 'reactive') && isChlorine(hits, words))
     return 'gas';
   if (literal(hits, 'alarm').length > 0 && !has(hits, 'elsewhere')) return 'person';
-  if (has(hits, 'fell') && has(hits, 'person') && vessel && !isDropped(hits)) return 'person';
+  const isFall = all(hits, 'fell').some((hit) => !isThing(hits, words, hit));
+  if (isFall && vessel && !isDropped(hits)) return 'person';
   if (!has(hits, 'silent')) return undefined;
   const inside = all(hits, 'went-in').some((hit) => !isThing(hits, words, hit));
   const isLost =
@@ -173,7 +178,7 @@ const ACIDS = /^(ac[iy]d|saure|citric|phosphoric|cleaner|pbw)/;
  * ```
  */
 export function recogniseEmergency(text: string, chat: Language): Emergency | undefined {
-  const words = text.match(/[\p{L}\d]+(?:'\p{L}+)*/gu);
+  const words = text.match(/[\p{L}\d]+(?:'\p{L}+)*|[,.;!?\n](?!\d)/gu);
   if (!words) return undefined;
   const found = hitsByLanguage(words);
   const languages = [...found].filter(([, hits]) => [...hits.keys()].some((id) => OPENERS.has(id)));

@@ -53,3 +53,43 @@ const NO_ENTRY = [
 test.each(NO_ENTRY)('%j is no entry for the log', (text) => {
   expect(readMessage(text, READER_DEFAULTS).readings.map(({ intent }) => intent)).not.toContain('added');
 });
+
+/** Messages beside whose words no dose of the usual salt may stand, with the problem they get. */
+const REFUSED = [
+  ['T4 20 hl pH 3.5 free 20 sodium bisulfite', 'unknown-additive'],
+  ['T4 20 hl pH 3.5 free 20 with sulfur', 'unknown-additive'],
+  ['T4 20 hl pH 3.5 free 20 NaHSO3 38%', 'unknown-additive'],
+  ['sulphur wick for barrel 17 pH 3.5 free 10', 'unknown-additive'],
+  ['sanitise barrels 10 L kmbs 2% citric acid', 'unknown-additive'],
+  ['mix kmbs with bleach 10 L', 'unknown-additive'],
+  ['T4 half full of 40 hl pH 3.5 free 18', 'ambiguous-number'],
+  ['free collapsed from 30 to 10 T4 20 hl pH 3.5', 'ambiguous-number'],
+  ['total 60,950 L pH 3.5 free 20', 'ambiguous-number'],
+] as const;
+
+test.each(REFUSED)('%j is refused as %s', (text, code) => {
+  const [reading] = readMessage(text, READER_DEFAULTS).readings;
+  expect(reading?.problems.map((problem) => problem.code)).toContain(code);
+});
+
+const IN_DANGER = [
+  'T4 1000 L pH 3.5 free 20, Marco passed out',
+  'T4 1000 L pH 3.5 free 20 Marco fainted',
+  'T4 20 hl pH 3.5, Pete collapsed',
+  'my mate fell off the ladder into the vat',
+  'nobody answers from inside T7',
+  'the so2 bottle fell and it is hissing',
+] as const;
+
+test.each(IN_DANGER)('%j comes before every figure', (text) => {
+  expect(readMessage(text, READER_DEFAULTS).readings.map(({ intent }) => intent)).toEqual(['emergency']);
+});
+
+test.each(['the pump on T3 is down', 'free is down to 12 in T4', 'the foam in T4 has collapsed'])(
+  '%j is no emergency',
+  (text) => {
+    expect(readMessage(text, READER_DEFAULTS).readings.map(({ intent }) => intent)).not.toContain(
+      'emergency',
+    );
+  },
+);

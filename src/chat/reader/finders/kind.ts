@@ -30,6 +30,7 @@ export function findKind(board: Board): void {
     const style = STYLES.find((one) => hasTag(board, i, `style:${one}`));
     const category = CATEGORIES.find((one) => hasTag(board, i, `category:${one}`));
     const product = PRODUCTS.find((one) => hasTag(board, i, `product:${one}`));
+    if (isCue(board, i - 1, 'not')) continue;
     if (style && isStranger(board, i + 1)) continue;
     if (product && isStranger(board, i + 1)) continue;
     if (category && (isStranger(board, i - 1) || isStranger(board, i + 1) || isThanks(board, i))) continue;

@@ -151,7 +151,9 @@ export function findLabelled(board: Board): void {
     for (let i = 0; i < board.terms.length; i++) {
       if (findWish(board, i)) continue;
       const label = labelAt(board, i);
-      if (label !== undefined && (label === 'so2' || label === 'volume') === weak) findLabel(board, i, label);
+      const isPercentVolume = label === 'volume' && isMark(board, i - 1, '%');
+      if (label !== undefined && !isPercentVolume && (label === 'so2' || label === 'volume') === weak)
+        findLabel(board, i, label);
     }
   }
 }

@@ -11,9 +11,20 @@ const isCounted = (board: Board, i: number): boolean =>
     hasTag(board, i, tag as 'vessel:barrel'),
   );
 
+/** `half full`, `2/3 full`: how much is in the tank nobody can tell from its size. */
+const isShare = (board: Board, i: number): boolean =>
+  (['half', 'third', 'quarter', 'two-thirds', 'three-quarters'] as const).some((cue) =>
+    isCue(board, i, cue),
+  ) ||
+  (board.terms[i]?.kind === 'number' && (board.terms[i - 1]?.text === '/' || board.terms[i].text === '½'));
+
 /** Refuses a number in words where a figure should stand: `two barrels`, `half a pound`. */
 export function findNumberWord(board: Board): void {
   for (let i = 0; i < board.terms.length; i++) {
+    if (isCue(board, i + 1, 'fullness') && isShare(board, i)) {
+      refuse(board, 'ambiguous-number', i, i + 1);
+      continue;
+    }
     if (!isCue(board, i, 'number-word') || board.taken[i] === true) continue;
     const to =
       isCue(board, i + 1, 'of') || isCue(board, i + 1, 'article') || isCue(board, i + 1, 'number-word')

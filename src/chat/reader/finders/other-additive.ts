@@ -1,5 +1,5 @@
 import type { Board } from '../board.ts';
-import { findingOf, hasTag, holdsCue, isCue, isFound, placeOf, refuse, termAt } from '../board.ts';
+import { findingOf, hasTag, holdsCue, isCue, isFound, placeOf, refuse, termAt, setAside } from '../board.ts';
 
 const CHEMICAL_SLIP = /^(meta)?(bi)?sul(f|ph)(at|id)es?$/;
 
@@ -34,6 +34,34 @@ const isPlainWord = (board: Board, i: number): boolean => {
   return term?.kind === 'word' && board.taken[i] !== true && term.tags.length === 0 && term.text.length >= 3;
 };
 
+/** Another chemical beside a sulfite: named as not used; in a solution with water it is refused, for acid or chlorine sets gas free. */
+function nameOnly(board: Board, i: number): void {
+  if (board.marks.solutionUse !== undefined) return refuseWord(board, i);
+  if (!isPassedOver(board, i)) setAside(board, i, i);
+}
+
+/** `no sorbate`, `after bentonite`, `sorbate yesterday`: talk of it, and no wish to add it now. */
+const isPassedOver = (board: Board, i: number): boolean =>
+  isCue(board, i - 1, 'not') ||
+  isCue(board, i - 1, 'no') ||
+  isCue(board, i - 1, 'ml-over') ||
+  isCue(board, i - 1, 'clock-before') ||
+  isCue(board, i - 1, 'article');
+
+/** A chemical named at the end, or after "with": in the additive's place. */
+function isOffered(board: Board, i: number): boolean {
+  const next = board.terms[i + 1];
+  const ends =
+    next === undefined ||
+    next.kind === 'break' ||
+    (next.kind === 'mark' && next.text !== '-') ||
+    isFreeStrength(board, i + 1);
+  return ends && !isPassedOver(board, i);
+}
+
+const isFreeStrength = (board: Board, i: number): boolean =>
+  board.terms[i]?.kind === 'number' && board.terms[i + 1]?.text === '%';
+
 /** Refuses a word in the additive's place that is none: bentonite, a sulphur wick, a sulfate. */
 export function findOtherAdditive(board: Board): void {
   const amount =
@@ -51,22 +79,22 @@ export function findOtherAdditive(board: Board): void {
     if (!named && isPlainWord(board, after) && after <= amount.to + 2 && !isBetween(board, after))
       return refuseWord(board, after);
   }
-  if (named) return;
   const anywhere = board.terms.findIndex(
     (_, i) => board.taken[i] !== true && (hasTag(board, i, 'additive:none') || isSulfateWord(board, i)),
   );
   if (anywhere < 0) return;
+  if (named) return nameOnly(board, anywhere);
   const isWick = isCue(board, anywhere, 'wick') && isFound(board, 'vessel');
-  const counted = isWick || board.terms[anywhere - 1]?.kind === 'number';
+  const slip = CHEMICAL_SLIP.test(termAt(board, anywhere).text.split(' ').at(-1) ?? '');
+  const isFigure = isFound(board, 'ph') || isFound(board, 'free_mg_L');
+  if (isWick || (isFigure && (slip || isOffered(board, anywhere)))) return refuseWord(board, anywhere);
   const wanted =
-    counted ||
+    board.terms[anywhere - 1]?.kind === 'number' ||
     amount !== undefined ||
     board.pastTense ||
     holdsCue(board, 'how-much') ||
     holdsCue(board, 'add') ||
-    board.marks.spoon === true;
-  const isFigure = isFound(board, 'ph') || isFound(board, 'free_mg_L');
-  const slip = CHEMICAL_SLIP.test(termAt(board, anywhere).text.split(' ').at(-1) ?? '');
-  if (slip && isFigure) return refuseWord(board, anywhere);
+    board.marks.spoon === true ||
+    board.marks.solutionUse !== undefined;
   if (wanted && !(isFigure && amount === undefined && !board.pastTense)) refuseWord(board, anywhere);
 }

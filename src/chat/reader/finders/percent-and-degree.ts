@@ -30,7 +30,7 @@ function findPercent(board: Board, i: number): void {
   if (!vol && isOfOther(board, i))
     return setAside(
       board,
-      isStranger(board, i - 1) || hasTag(board, i - 1, 'additive:none') ? i - 1 : i,
+      isStranger(board, i - 1) ? i - 1 : i,
       isStranger(board, i + 2) || isCue(board, i + 2, 'variety') ? i + 2 : i + 1,
     );
   if (vol || (value >= 5 && value <= 22))

@@ -66,6 +66,12 @@ export function findStage(board: Board): void {
       find(board, 'stage', 'fermenting', 'labelled', i, i);
     } else if (isCue(board, i, 'ml') && !isUnit(board, i)) {
       const stage = malolacticAt(board, i);
+      // `ML 90% done`: not done.
+      const isPart = board.terms[i + 1]?.kind === 'number' && isMark(board, i + 2, '%');
+      if (isPart) {
+        find(board, 'stage', 'malolactic', 'labelled', i, isCue(board, i + 3, 'over') ? i + 3 : i + 2);
+        continue;
+      }
       const to = isCue(board, i + 1, 'over') || isCue(board, i + 1, 'ml-bugs') ? i + 1 : i;
       if (stage) find(board, 'stage', stage, 'labelled', i, to);
     } else {

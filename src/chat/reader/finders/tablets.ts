@@ -1,6 +1,17 @@
 import type { AdditiveId } from '../../../core/additives/additive-id.ts';
 import type { Board } from '../board.ts';
-import { claim, figureAt, find, hasTag, isCue, isFree, isMark, refuse, isLabelled } from '../board.ts';
+import {
+  claim,
+  figureAt,
+  find,
+  hasTag,
+  isCue,
+  isFree,
+  isMark,
+  refuse,
+  isLabelled,
+  claimsNext,
+} from '../board.ts';
 import { unitAt } from '../units.ts';
 
 /** Grams of salt above which a plain tablet is no plain tablet. */
@@ -52,7 +63,9 @@ const skipTimes = (board: Board, i: number): number =>
 /** The number of tablets that ends at term `i`, if one does. */
 function countBefore(board: Board, i: number): number | undefined {
   const k = skipTimes(board, i);
-  return isFree(board, k) && !isMark(board, k - 1, '/') && !isLabelled(board, k) ? k : undefined;
+  return isFree(board, k) && !isMark(board, k - 1, '/') && !isLabelled(board, k) && !claimsNext(board, k - 1)
+    ? k
+    : undefined;
 }
 
 function findCampden(board: Board, i: number): void {

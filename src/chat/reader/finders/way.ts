@@ -26,7 +26,9 @@ function findWayAt(board: Board, i: number): boolean {
     refuse(board, 'ambiguous-number', i, second.to);
     return true;
   }
-  if (isCue(board, i - 1, 'lately')) {
+  const falls =
+    second.kind !== 'molecular' && second.mg_L > MOST_BARE_MOLECULAR_mg_L && second.mg_L < first.mg_L;
+  if (isCue(board, i - 1, 'lately') || falls) {
     refuse(board, 'ambiguous-number', i - 1, second.to);
     return true;
   }

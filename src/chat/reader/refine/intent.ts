@@ -47,9 +47,16 @@ function isAdded(board: Board): boolean {
   return (
     said ||
     (hasAdditive(board) && !isOnlyDone) ||
-    (hasVessel(board) && !isOnlyDone && !any(board, 'ph', 'free_mg_L') && holdsSulfite(board))
+    (hasVessel(board) &&
+      !isOnlyDone &&
+      !any(board, 'ph', 'free_mg_L') &&
+      (holdsSulfite(board) || isBareNote(board)))
   );
 }
+
+/** `added T4`: nothing else is said, so what is missing is the amount. */
+const isBareNote = (board: Board): boolean =>
+  board.terms.length <= 5 && !board.terms.some((_, i) => isStranger(board, i) || isCue(board, i, 'water'));
 
 const holdsSulfite = (board: Board): boolean => board.cues.has('label:so2') || board.cues.has('cue:addition');
 

@@ -348,6 +348,7 @@ export const en: Words = {
     'cue:buy': ['order', 'buy', 'bought', 'ordered', 'invoice', 'invoiced', 'delivered', 'delivery', 'purchase', 'received', 'ship', 'shipped'],
     'cue:lately': ['dropped from', 'fell from', 'went from', 'down from', 'came down from', 'gone from', 'has gone from'],
     'cue:share-word': ['off', 'of', 'new', 'more', 'less', 'extra', 'bigger', 'smaller', 'loss', 'fraction', 'discount', 'blend', 'topping', 'press', 'over', 'under', 'headspace', 'ullage', 'stems', 'higher', 'lower', 'up', 'down'],
+    'cue:fullness': ['full', 'full of', 'empty', 'filled'],
     'cue:greeting': [
       'hi', 'hello', 'hey', 'good morning', 'morning', 'good afternoon', 'good evening', 'evening', 'yo',
       'hiya', 'howdy', 'gday', "g'day", 'hallo', 'hi there', 'hey there', 'greetings', 'afternoon', 'sup',
@@ -548,13 +549,13 @@ export const en: Words = {
     smell: ['smell', 'smells', 'stink', 'stinks', 'smelling', 'reeks', 'reek'],
     place: ['cellar', 'room', 'building', 'hall', 'everywhere', "can't stay", 'cant stay', 'had to leave', "can't go in", 'cant go in', 'whole place', 'winery', 'barrel room', 'tank room'],
     skin: ['on my hands', 'on my hand', 'on my skin', 'on his skin', 'on her skin', 'on his hands', 'on her hands', 'on my arm', 'on his arm', 'on my arms', 'on my leg', 'down my arm', 'on my face', 'all over me', 'on me'],
-    idiom: ['unconscious bias', 'passed out the', 'passed out new', 'drowning in', 'swallowed her pride', 'swallowed his pride', 'swallowed my pride', 'swallowed our pride', "can't breathe with", 'cant breathe with', 'collapsed laughing', 'collapsed into bed', 'collapsed on the couch', 'collapsed in bed', 'choking on the price', 'down in price', 'down in volume', 'down in the dumps', 'heart attack prices'],
+    idiom: ['unconscious bias', 'passed out the', 'passed out new', 'drowning in', 'swallowed her pride', 'swallowed his pride', 'swallowed my pride', 'swallowed our pride', "can't breathe with", 'cant breathe with', 'collapsed laughing', 'collapsed into bed', 'collapsed on the couch', 'collapsed in bed', 'choking on the price', 'down in price', 'down in volume', 'down in the dumps', 'heart attack prices', 'is down to', 'is down by', 'is down from', 'is down at', 'is down again', 'is down a'],
     down: [
       'collapsed', 'has collapsed', 'collapsing', 'passed out', 'fainted', 'unconscious', 'knocked out',
       'blacked out', 'unresponsive', 'lying on the floor', 'on the floor not moving', 'not waking',
       "won't wake up", 'wont wake up', 'is out cold', 'out cold', 'keeled over', 'fell unconscious',
       'not moving', "isn't moving", 'isnt moving', 'not waking up', "doesn't move", 'doesnt move',
-      'overcome by fumes', 'convulsing', 'seizure', 'lost consciousness', 'no pulse', 'turned blue', 'turning blue', 'going blue', 'blue lips', 'both are down', 'are down in', 'is down in', 'down in the tank', "someone's down", "somebody's down", 'someone is down', 'somebody is down', 'man is down', 'chest hurts', 'chest pain', 'went down in', 'hit the floor', 'heart attack', 'having a fit'],
+      'overcome by fumes', 'convulsing', 'seizure', 'lost consciousness', 'no pulse', 'turned blue', 'turning blue', 'going blue', 'blue lips', 'both are down', 'are down in', 'is down in', 'down in the tank', "someone's down", "somebody's down", 'someone is down', 'somebody is down', 'man is down', 'chest hurts', 'chest pain', 'went down in', 'hit the floor', 'heart attack', 'having a fit', 'lips are blue', 'face is blue', 'chest is tight', 'tight chest', 'chest tightness', 'down in the pit', 'down in the press', 'he is down', 'she is down', "he's down", "she's down", 'is down help', 'is down and not'],
     breathless: [
       "can't breathe", 'cant breathe', 'cannot breathe', 'can not breathe', 'cant breath', "can't breath",
       'not breathing', "isn't breathing", 'isnt breathing', 'stopped breathing', 'hard to breathe',
@@ -571,16 +572,15 @@ export const en: Words = {
       'child', 'hand', 'cellar hand', 'person', 'people', 'employee', 'helper', 'trainee', 'brother', 'father',
       'dad', 'son', 'winemaker', 'partner', 'workmate', 'foreman', 'driver', 'visitor', 'student', 'sister',
       'mother', 'mum', 'mom', 'daughter', 'wife', 'husband', 'they', 'apprentice', 'teammate', 'crew',
-      'assistant',
-    ],
+      'assistant', 'nobody', 'no one', "someone's", "somebody's"],
     thing: [
       'foam', 'cap', 'hat', 'tank', 'tanks', 'barrel', 'barrels', 'rack', 'racks', 'pump', 'hose', 'shelf',
       'shelves', 'stack', 'roof', 'price', 'prices', 'market', 'bag', 'bags', 'box', 'boxes', 'pallet',
       'pallets', 'krausen', 'ferment', 'fermentation', 'tent', 'trellis', 'bubble', 'wall', 'cork', 
       'bladder', 'ph', 'free', 'so2', 'yeast', 'crust', 'trench', 'row', 'filter', 'cake', 'hopper',
       'structure', 'wine', 'aroma', 'flavour', 'flavor', 'bed', 'airlock', 'app', 'phone', 'press', 'acidity',
-      'cart', 'stand', 'frame', 'ladder', 'chair', 'table', 'froth', 'mousse', 'liner', 'jacket', 'pomace', 'bridge', 'scaffold', 'scaffolding', 'economy', 'deal', 'talks', 'shed', 'road', 'barn', 'tarp', 'canopy', 'wire', 'wires', 'post', 'posts', 'dam', 'bank', 'tunnel'],
-    fell: ['fell in', 'fell into', 'fallen in', 'fallen into', 'slipped into', 'falls into', 'fell down'],
+      'cart', 'stand', 'frame', 'ladder', 'chair', 'table', 'froth', 'mousse', 'liner', 'jacket', 'pomace', 'bridge', 'scaffold', 'scaffolding', 'economy', 'deal', 'talks', 'shed', 'road', 'barn', 'tarp', 'canopy', 'wire', 'wires', 'post', 'posts', 'dam', 'bank', 'tunnel', 'network', 'internet', 'power', 'site', 'website', 'server', 'system', 'printer', 'forklift', 'chiller', 'glycol', 'compressor', 'crusher', 'destemmer', 'line', 'jar', 'lid', 'thermometer', 'hydrometer', 'bung', 'tool', 'wrench', 'bottle', 'sample', 'bucket', 'leaf', 'bird', 'glass', 'temp', 'temperature', 'total', 'alcohol', 'brix', 'level', 'volume', 'ta', 'va', 'rs', 'demand', 'count', 'yield', 'hail', 'gasket', 'valve', 'clamp', 'key', 'keys', 'pen', 'notebook', 'spanner', 'cable', 'wifi', 'computer', 'scale', 'meter'],
+    fell: ['fell in', 'fell into', 'fallen in', 'fallen into', 'slipped into', 'falls into', 'fell down', 'fell off', 'fell from', 'fell through'],
     beside: [
       'next', 'by', 'near', 'in', 'into', 'at', 'beside', 'on', 'behind', 'from', 'under', 'inside', 'to', 'of', 'out'],
     silent: [
@@ -593,8 +593,7 @@ export const en: Words = {
       'wont respond', 'has stopped answering', "hasn't come back out", 'no reply', "doesn't come out",
       'doesnt come out', 'went quiet', 'gone quiet', 'not coming out', "won't come out", 'is silent',
       'not reacting', 'quiet now', "can't hear him", "can't hear her", 'no longer answers',
-      'no longer answering', 'stuck inside', 'trapped', 'is stuck inside',
-    ],
+      'no longer answering', 'stuck inside', 'trapped', 'is stuck inside', 'stuck in the tank', 'stuck in tank', 'stuck in the vat', 'stuck in the press', 'nobody answers', 'no one answers', 'nobody is answering'],
     'went-in': [
       'went in', 'went into', 'climbed in', 'climbed into', 'fell in', 'fell into', 'fallen in', 'fallen into',
       'jumped in', 'jumped into', 'got into', 'crawled into', 'crawled in', 'entered', 'is in the tank',
@@ -611,7 +610,7 @@ export const en: Words = {
       'eye is burning', 'eyes burn', 'burning eyes', 'burns my eyes', 'burning my eyes', 'burning in my eyes',
       'burnt my eyes', 'eye burning', 'in an eye', 'eyes are on fire', 'eyes sting', 'eyes stinging',
       'eyes are stinging', 'in your eyes', 'in your eye', 'eye splash', 'in eyes', 'in eye',
-      'splashed my eyes', 'splashed my eye', 'splashed his eyes', 'splashed her eyes', 'in my contact lens', 'in my contacts', 'in my lens', 'under my contact lens', 'in his contact lens', 'in her contact lens'],
+      'splashed my eyes', 'splashed my eye', 'splashed his eyes', 'splashed her eyes', 'in my contact lens', 'in my contacts', 'in my lens', 'under my contact lens', 'in his contact lens', 'in her contact lens', 'in face', 'so2 in face'],
     swallowed: ['swallowed', 'ingested', 'gulped', 'swallows'],
     drank: ['drank', 'has drunk', 'drunk', 'drank from', 'ate', 'sipped', 'eaten', 'swallow', 'drinks'],
     vessel: [
@@ -621,8 +620,7 @@ export const en: Words = {
     chemical: [
       'kmbs', 'meta', 'metabisulfite', 'metabisulphite', 'so2', 'sulfite', 'sulphite', 'sulfites', 'campden',
       'chemical', 'acid', 'caustic', 'sulfur', 'sulphur', 'sulfur dioxide', 'sulphur dioxide', 'k meta',
-      'bisulfite', 'bisulphite', 'sulfurous', 'cleaner', 'stock',
-    ],
+      'bisulfite', 'bisulphite', 'sulfurous', 'cleaner', 'stock', 'ammonium', 'ammonium bisulfite', 'potassium bisulfite'],
     gas: [
       'gas', 'sulfur', 'sulphur', 'so2', 'sulfur dioxide', 'sulphur dioxide', 'cylinder', 'so2 bottle', 'gas bottle', 'fumes',
       'co2', 'the bottle of so2', 'so2 cylinder', 'regulator',
@@ -634,14 +632,13 @@ export const en: Words = {
     burnt: [
       'burned my', 'burnt my', 'burned his', 'burnt his', 'burned her', 'burnt her', 'chemical burn',
       'on my skin', 'on his skin', 'on her skin', 'burning skin', 'burns on', 'skin is burning',
-      'burned himself', 'burnt himself', 'burned herself', 'skin burning', 'burned myself', 'burnt myself',
-    ],
+      'burned himself', 'burnt himself', 'burned herself', 'skin burning', 'burned myself', 'burnt myself', 'skin burns', 'burns from', 'burned by', 'burnt by'],
     alarm: [
       'call an ambulance', 'call ambulance', 'ambulance', 'call 911', 'call 112', 'call 999', 'emergency',
       'sos', 'mayday', 'need a medic', 'need a doctor now', 'poisoned', 'been gassed', 'gassed',
       'call emergency', 'overcome by gas', 'overcome by so2', 'inhaled so2', 'inhaled gas', 'breathed in so2',
       'breathed in gas', 'inhaled', 'breathed in', 'man down', 'people down', 'electrocuted', 'drowning',
-      'drowned', 'co2 alarm', 'gas alarm', 'so2 alarm', 'alarm going off', 'alarm is going off', 'alarm is going', 'gas detector going off', 'line burst', 'hose burst'],
+      'drowned', 'co2 alarm', 'gas alarm', 'so2 alarm', 'alarm going off', 'alarm is going off', 'alarm is going', 'gas detector going off', 'line burst', 'hose burst', 'gas in room', 'gas in the room', 'so2 gas in the', 'dioxide everywhere', 'gas everywhere', 'fumes everywhere', 'gas all over'],
     elsewhere: [
       'phone', 'email', 'emails', 'text', 'texts', 'call', 'calls', 'message', 'messages', 'whatsapp', 'mail',
       'supplier', 'lab', 'customer', 'client', 'exit', 'light', 'drill', 'lighting', 'contact', 'number',

@@ -28,7 +28,7 @@ export type CueId =
   | 'fruit' | 'wine' | 'verb' | 'pronoun' | 'month' | 'lot' | 'variety'
   | 'greeting' | 'thanks' | 'help' | 'cellar' | 'plain' | 'potassium' | 'sodium' | 'yet'
   | 'percent' | 'please' | 'in-store' | 'into' | 'clock-before' | 'no' | 'states' | 'plus' | 'times' | 'wick'
-  | 'should' | 'share-word' | 'limit' | 'sample-word' | 'past-time' | 'put' | 'lately' | 'bag' | 'buy' | 'in-water-name' | 'solution-name' | 'per-barrel' | 'rises-too' | 'tap-too'; // prettier-ignore
+  | 'should' | 'fullness' | 'share-word' | 'limit' | 'sample-word' | 'past-time' | 'put' | 'lately' | 'bag' | 'buy' | 'in-water-name' | 'solution-name' | 'per-barrel' | 'rises-too' | 'tap-too'; // prettier-ignore
 
 /** What a word is. */
 export type Tag =
