@@ -1,3 +1,4 @@
+import { LEXICON } from './lexicon.ts';
 import type { Language } from './understood.ts';
 import { ALL_WORDS } from './words/all.ts';
 import type { DangerId, Words } from './words/words.ts';
@@ -86,12 +87,19 @@ const has = (hits: Hits, id: DangerId): boolean => hits.has(id);
 function isThing(hits: Hits, words: readonly string[], { from }: Hit): boolean {
   const isBeside = (at: number): boolean =>
     all(hits, 'beside').some((hit) => hit.from < at && at - hit.from <= 2);
-  const near = (at: number): boolean =>
-    at < from && from - at <= 2 && !words.slice(at, from).some(isStop) && !isBeside(at);
+  const near = (at: number): boolean => {
+    const between = words.slice(at + 1, from);
+    const joined = from - at <= 2 || (from - at <= 5 && !between.some(isName));
+    return at < from && joined && !between.some(isStop) && !isBeside(at);
+  };
   const person = all(hits, 'person').some((hit) => hit.to < from && from - hit.to <= 3);
   const vessel = words.some((word, at) => near(at) && /^(t|fv|b)\d+$/.test(word));
   return (vessel || all(hits, 'thing').some((hit) => near(hit.to))) && !person;
 }
+
+/** A word that no list knows: between a thing and a fall it may be who fell (`free 20 Marco fainted`). */
+const isName = (word: string): boolean =>
+  word.length > 3 && !/[\d']/.test(word) && !LEXICON.phrases.has(word) && !INDEX.has(word);
 
 /** A comma or a full stop: what stands before it is no subject of what follows. */
 const isStop = (word: string): boolean => /^[,.;!?\n]$/.test(word);

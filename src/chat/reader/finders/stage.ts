@@ -67,9 +67,10 @@ export function findStage(board: Board): void {
     } else if (isCue(board, i, 'ml') && !isUnit(board, i)) {
       const stage = malolacticAt(board, i);
       // `ML 90% done`: not done.
-      const isPart = board.terms[i + 1]?.kind === 'number' && isMark(board, i + 2, '%');
+      const isPart =
+        board.terms[i + 1]?.kind === 'number' && isMark(board, i + 2, '%') && isCue(board, i + 3, 'over');
       if (isPart) {
-        find(board, 'stage', 'malolactic', 'labelled', i, isCue(board, i + 3, 'over') ? i + 3 : i + 2);
+        find(board, 'stage', 'malolactic', 'labelled', i, i + 3);
         continue;
       }
       const to = isCue(board, i + 1, 'over') || isCue(board, i + 1, 'ml-bugs') ? i + 1 : i;
