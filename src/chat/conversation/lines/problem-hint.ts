@@ -37,7 +37,8 @@ const MOST_mg_L = 1000;
 const NUMBER = /\d+(?:[.,]\d+)?/g;
 
 /** The way to write a figure plainly, made of the person's own words and figures. */
-export function hintFor(reading: Reading, about: string, mark: DecimalMark): Hint {
+export function hintFor(reading: Reading, words: string, mark: DecimalMark): Hint {
+  const about = withoutSO2(words);
   const [first = '', second = ''] = about.match(NUMBER) ?? [];
   const none = { one: first, two: second, named: '' };
   const { fields } = reading;
@@ -59,6 +60,11 @@ export function hintFor(reading: Reading, about: string, mark: DecimalMark): Hin
   return hint.kind === 'free' && fields.free_mg_L !== undefined ? { ...hint, kind: 'other' } : hint;
 }
 
+/** A person's words without "SO2", whose 2 is no figure. */
+export function withoutSO2(words: string): string {
+  return words.replace(/\bso[2₂]/giu, '').trim();
+}
+
 function isPh(text: string): boolean {
   return /^[2-4][.,]\d+$/.test(text);
 }
@@ -71,7 +77,7 @@ function ofConcentration(about: string, first: string, named: string): Hint {
   const one = plain(mg_L);
   const hasUnit = isPerHectolitre || /ppm|mg/i.test(about);
   if (hasUnit && named !== '') return { kind: 'powder', one, two: plain(mg_L / 100), named };
-  if (isPerHectolitre || /^\s*(so2\s*)?[\d.,]+\s*(ppm|mg\/l)?$/i.test(about))
+  if (isPerHectolitre || /^\s*[\d.,]+\s*(ppm|mg\/l)?$/i.test(about))
     return { kind: first === '' || isPh(first) ? 'other' : 'free', one, two: '', named };
   return { kind: hasUnit ? 'aim' : 'other', one, two: '', named };
 }

@@ -5,7 +5,7 @@ import type { Line } from '../../replies/reply.ts';
 import type { SentenceKey } from '../../replies/sentence-keys.ts';
 import { line } from './line.ts';
 import { noteText } from './notes.ts';
-import { hintFor } from './problem-hint.ts';
+import { hintFor, withoutSO2 } from './problem-hint.ts';
 
 /**
  * Each problem in a sentence with what to send instead; beside one no figure is given.
@@ -43,7 +43,7 @@ function keyOf(code: ProblemCode, about: string, reading: Reading): SentenceKey 
 
 /** The two figures of a total below the free, the other way round: so they are right. */
 function swapped(about: string): Line['values'] {
-  const figures = about.match(/\d+(?:[.,]\d+)?/g) ?? [];
+  const figures = withoutSO2(about).match(/\d+(?:[.,]\d+)?/g) ?? [];
   const order = figures.toSorted((a, b) => Number(a.replace(',', '.')) - Number(b.replace(',', '.')));
   return { one: order[0] ?? '', two: order.at(-1) ?? '' };
 }
