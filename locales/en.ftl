@@ -301,12 +301,17 @@ set-aside-figure = { $text }
 ask-vessel = { at }which vessel? Like: T4
 ask-volume_L =
     { $unit ->
-        [L] { at }what volume? In litres, or with its unit: 40 hl, 1450 gal
-        [hL] { at }what volume? In hectolitres, or with its unit: 4000 L, 1450 gal
-        [m3] { at }what volume? In cubic metres, or with its unit: 40 hl
-        [galUS] { at }what volume? In US gallons, or with its unit: 40 hl
-        [galUK] { at }what volume? In imperial gallons, or with its unit: 40 hl
-       *[other] { at }what volume? With its unit: 225 L, 1450 gal
+        [L] { at }what volume{ of-each }? In litres, or with its unit: 40 hl, 1450 gal
+        [hL] { at }what volume{ of-each }? In hectolitres, or with its unit: 4000 L, 1450 gal
+        [m3] { at }what volume{ of-each }? In cubic metres, or with its unit: 40 hl
+        [galUS] { at }what volume{ of-each }? In US gallons, or with its unit: 40 hl
+        [galUK] { at }what volume{ of-each }? In imperial gallons, or with its unit: 40 hl
+       *[other] { at }what volume{ of-each }? With its unit: 225 L, 1450 gal
+    }
+of-each =
+    { $count ->
+        [several] {" "}of each
+       *[one] {""}
     }
 ask-ph = { at }what pH? Like: 3.58
 ask-free_mg_L = { at }what free SO2, in { $unit }? Like: 21

@@ -1,5 +1,6 @@
 import { finishReading } from '../reader/finish-reading.ts';
 import type { Fields, FieldName, Intent, Reading } from '../reader/understood.ts';
+import { ofAllVessels } from './each-vessel.ts';
 import type { Waiting } from './memory.ts';
 import type { Settings } from './settings.ts';
 
@@ -97,22 +98,19 @@ function settles({ doubt, reading }: Waiting, next: Reading): boolean {
   return !reading.marks.eachOrTotal || whole === true;
 }
 
-/** The volume of all vessels, where the answer says it is of each. */
-function ofAllVessels(reading: Reading, next: Reading): Reading {
-  const { volume_L, vessels } = next.fields;
-  const count = reading.fields.vessels?.length;
-  if (volume_L === undefined || vessels !== undefined || count === undefined || !next.marks.statedEach)
-    return next;
-  return { ...next, fields: { ...next.fields, volume_L: volume_L * count } };
+/** Beside a problem nothing is asked. */
+function withProblems(reading: Reading, { problems }: Reading): Reading {
+  return problems.length === 0 ? reading : { ...reading, problems, asks: [] };
 }
 
 /** The reading that waits with its answer; while the answer leaves in doubt what was, the problem stands. */
 export function completeWaiting(waiting: Waiting, next: Reading, settings: Settings): Reading {
   const { doubt, reading } = waiting;
-  if (doubt === undefined) return complete(reading, next, settings);
+  const whole = ofAllVessels(reading, next);
+  if (doubt === undefined) return withProblems(complete(reading, whole, settings), whole);
   if (!settles(waiting, next))
     return { ...complete(reading, next, settings), problems: doubt.problems, asks: [] };
   const { eachOrTotal: _asked, ...marks } = reading.marks;
   const notes = reading.notes.filter(({ id }) => id !== 'each-or-total');
-  return complete({ ...reading, marks, notes }, ofAllVessels(reading, next), settings);
+  return withProblems(complete({ ...reading, marks, notes }, whole, settings), whole);
 }

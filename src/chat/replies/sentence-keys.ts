@@ -26,7 +26,7 @@ export interface SentenceValues {
   'ask-target': 'usual' | 'vessel';
   'ask-target-stage': 'adds' | 'count' | 'stage' | 'unit' | 'vessel' | 'wine';
   'ask-vessel': 'vessel';
-  'ask-volume_L': 'unit' | 'vessel';
+  'ask-volume_L': 'count' | 'unit' | 'vessel';
   assumed: 'list';
   'assumed-additive': 'additive';
   'assumed-barrels': 'count' | 'volume';
@@ -182,6 +182,7 @@ export interface SentenceValues {
   'note-volume-sum': 'text';
   'nothing-why': 'free' | 'kind' | 'molecular' | 'ph' | 'value';
   'nothing-why-free': 'free' | 'kind' | 'value';
+  'of-each': 'count';
   'old-button': never;
   option: 'list' | 'mark';
   'other-as-allowance': 'amount' | 'count' | 'factor' | 'percent' | 'unit';

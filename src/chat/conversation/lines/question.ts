@@ -28,7 +28,7 @@ function questionOf(
 ): Omit<Line, 'room'> {
   if (field === 'volume_L') {
     if (noteText(reading, 'fruit-by-weight') !== undefined) return { key: 'ask-fruit', values: {} };
-    return { key: 'ask-volume_L', values: { unit: settings.volumeUnit } };
+    return { key: 'ask-volume_L', values: { unit: settings.volumeUnit, count: countText(reading) } };
   }
   if (field === 'target') return targetQuestion(reading, manner, settings);
   if (field === 'additive' && reading.asks.includes('tablet_salt_g'))
@@ -38,6 +38,10 @@ function questionOf(
   if (field === 'strength_percent')
     return { key: 'ask-strength_percent', values: { named: reading.fields.additive ?? 'other' } };
   return { key: `ask-${field}`, values: { unit: manner.unit } };
+}
+
+function countText({ fields }: Reading): string {
+  return fields.vessels === undefined ? 'one' : 'several';
 }
 
 /** At some stages it is asked what is added; and some wine has no usual target, which is said. */
