@@ -5,3 +5,4 @@ emergency-nobody-in = Niemand steigt oder beugt sich jemandem hinterher.
 emergency-call = Den Notruf wählen.
 emergency-swallowed = Verschluckt: Mund ausspülen, nicht zum Erbrechen bringen, Giftnotruf oder Notruf wählen.
 emergency-eyes = Augen: 15 Minuten mit Wasser spülen, Kontaktlinsen heraus.
+emergency-skin = Haut: mit viel Wasser spülen, nasse Kleidung ausziehen.

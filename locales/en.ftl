@@ -498,6 +498,7 @@ emergency-nobody-in = Nobody goes in or leans in after anyone.
 emergency-call = Call the emergency services.
 emergency-swallowed = Swallowed: rinse the mouth, do not make them vomit, call poison control or the emergency services.
 emergency-eyes = Eyes: rinse with water for 15 minutes, contact lenses out.
+emergency-skin = Skin: rinse with plenty of water, take wet clothes off.
 
 ## The working
 
@@ -613,7 +614,11 @@ round-low = ⚠ Below 10 free much or all may bind: { $list }. There measure bef
 round-name = { $name }
 round-again = Send each line that could not be read again, whole.
 round-target-stage = { at }how many mg/L do you want to add?
-round-not-understood = “{ $about }” I could not read.
+round-not-understood =
+    { $about ->
+        [none] One line I could not read.
+       *[other] “{ $about }” I could not read.
+    }
 round-effect = A third to a half of an addition usually binds: measure tomorrow. For a vessel’s working send its line alone.
 choice-additive = { $value ->
         [potassium-metabisulfite] Potassium metabisulfite

@@ -5,3 +5,4 @@ emergency-nobody-in = Nadie entra ni se asoma detrás de nadie.
 emergency-call = Llamad a emergencias.
 emergency-swallowed = Tragado: enjuagar la boca, no provocar el vómito, llamar a toxicología o a emergencias.
 emergency-eyes = Ojos: enjuagar con agua 15 minutos y quitar las lentillas.
+emergency-skin = Piel: enjuagar con mucha agua y quitar la ropa mojada.

@@ -5,3 +5,4 @@ emergency-nobody-in = Personne n’entre ni ne se penche pour aller chercher que
 emergency-call = Appelez les secours.
 emergency-swallowed = Avalé : rincer la bouche, ne pas faire vomir, appeler le centre antipoison ou les secours.
 emergency-eyes = Yeux : rincer à l’eau pendant 15 minutes, enlever les lentilles.
+emergency-skin = Peau : rincer à grande eau, enlever les vêtements mouillés.

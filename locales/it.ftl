@@ -5,3 +5,4 @@ emergency-nobody-in = Nessuno entra o si sporge dentro per soccorrere qualcuno.
 emergency-call = Chiamate i soccorsi.
 emergency-swallowed = Ingerito: sciacquare la bocca, non far vomitare, chiamare il centro antiveleni o i soccorsi.
 emergency-eyes = Occhi: sciacquare con acqua per 15 minuti, togliere le lenti a contatto.
+emergency-skin = Pelle: sciacquare con molta acqua, togliere i vestiti bagnati.

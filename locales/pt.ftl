@@ -5,3 +5,4 @@ emergency-nobody-in = Ninguém entra nem se debruça atrás de ninguém.
 emergency-call = Liguem para a emergência.
 emergency-swallowed = Engolido: enxaguar a boca, não provocar o vómito, ligar para o centro antivenenos ou para a emergência.
 emergency-eyes = Olhos: lavar com água durante 15 minutos, tirar as lentes de contacto.
+emergency-skin = Pele: lavar com muita água, tirar a roupa molhada.

@@ -126,6 +126,7 @@ export interface SentenceValues {
   'emergency-eyes': never;
   'emergency-nobody-in': never;
   'emergency-out': never;
+  'emergency-skin': never;
   'emergency-swallowed': never;
   'fact-alcohol': 'percent';
   'fact-allowance': 'percent';

@@ -6,7 +6,8 @@ import type { Outcome } from '../outcome.ts';
 
 /**
  * What comes before all else, in the order it is done. Eyes: the data sheets' P305+P351+P338 (rinse, take lenses out);
- * swallowed: rinse the mouth, no vomiting, poison control (common practice, no source); out to fresh air, nobody after
+ * swallowed: rinse the mouth, no vomiting, poison control (common practice, no source); skin: rinse, take wet clothes
+ * off (common practice, no source); out to fresh air, nobody after
  * anyone, the emergency services: common practice, no source.
  */
 const EMERGENCY = ['emergency-out', 'emergency-nobody-in', 'emergency-call', 'emergency-eyes'] as const;
@@ -15,6 +16,7 @@ const EMERGENCY = ['emergency-out', 'emergency-nobody-in', 'emergency-call', 'em
 const FIRST_AID: Readonly<Record<string, SentenceKey>> = {
   eyes: 'emergency-eyes',
   swallowed: 'emergency-swallowed',
+  skin: 'emergency-skin',
 };
 
 function keysFor(topic: string | undefined): readonly SentenceKey[] {
