@@ -27,6 +27,8 @@ export interface Remembered {
   readonly number: number;
   readonly reading: Reading;
   readonly at: number;
+  /** Whether its target was one of the bot's own offers: that counts for the stage it was offered at and no other. */
+  readonly chosen?: true;
 }
 
 /** All that is kept of one conversation; plain JSON. */

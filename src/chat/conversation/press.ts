@@ -37,7 +37,7 @@ export function handlePress(
     case 'm':
       return moreOf(message, found, memory, settings);
     case 'nf':
-      return again(complete(found.reading, { fields: { stage: 'malolactic' } }, settings));
+      return again(complete(statedOf(found), { fields: { stage: 'malolactic' } }, settings));
     case 'red':
       return again(complete(found.reading, { fields: { style: 'red' } }, settings));
     case 't':
@@ -46,7 +46,7 @@ export function handlePress(
       const choice = chosen(found.reading, Number(button.which), markOf(memory), settings);
       if (choice === undefined) return saying(settings, [line('first', 'old-button')]);
       if ('lines' in choice) return saying(settings, choice.lines);
-      return again(complete(found.reading, { fields: { target: choice.target } }, settings));
+      return asChosen(again(complete(found.reading, { fields: { target: choice.target } }, settings)));
     }
     case 'l': {
       const field = waitsFor(found.reading);
@@ -56,6 +56,28 @@ export function handlePress(
       return again(complete(found.reading, { fields }, settings));
     }
   }
+}
+
+/** The reading as the person stated it: without a target that was the bot's own offer. */
+function statedOf({ reading, chosen: isOffer }: Remembered): Reading {
+  return isOffer ? withoutTarget(reading) : reading;
+}
+
+function withoutTarget(reading: Reading): Reading {
+  const { target: _target, ...fields } = reading.fields;
+  return { ...reading, fields };
+}
+
+/** Keeps of the reading that was just answered that its target was an offer. */
+function asChosen({ writes, ...rest }: Handled): Handled {
+  return {
+    ...rest,
+    writes: writes.map(({ memory, ...write }) => {
+      const { remembered } = memory;
+      const last = remembered.slice(-1).map((one) => ({ ...one, chosen: true as const }));
+      return { ...write, memory: { ...memory, remembered: [...remembered.slice(0, -1), ...last] } };
+    }),
+  };
 }
 
 function markOf(memory: Memory): DecimalMark {
@@ -98,9 +120,8 @@ function askTarget(
   memory: Memory,
   settings: Settings,
 ): Handled {
-  const { target: _target, ...fields } = reading.fields;
-  const { assumed: _assumed, asks: _asks, ...draft } = reading;
-  const without = finishReading({ ...draft, fields }, settings);
+  const { assumed: _assumed, asks: _asks, ...draft } = withoutTarget(reading);
+  const without = finishReading(draft, settings);
   const { waiting: _before, ...others } = memory;
   // At a stage without a usual target nothing may wait: there it is to be written whole.
   const next: Memory = mayWaitFor('target', without)

@@ -4,6 +4,7 @@ import { answerOfNames } from './answer-of-names.ts';
 import { answerRound } from './answer-round.ts';
 import { answerSingle } from './answer-single.ts';
 import { figureAfterTarget, isBareNumber, noSuchButton, numberAskedAbout } from './bare-number.ts';
+import { parseKey } from './buttons.ts';
 import { checkFields } from './check-fields.ts';
 import { choiceByWords } from './choice-by-words.ts';
 import { answers, asAnswered, complete, completeWaiting } from './complete.ts';
@@ -46,10 +47,15 @@ function byKeyboard(
   memory: Memory,
   settings: Settings,
 ): Handled | undefined {
-  if (!/^\d{1,2}$/.test(mark) || memory.lastButtons.length === 0) return undefined;
+  if (!/^\d{1,3}$/.test(mark) || memory.lastButtons.length === 0) return undefined;
   const button = memory.lastButtons[Number(mark) - 1];
   if (button !== undefined) return handlePress(message, button, memory, settings);
-  return mark.length === 1 ? noSuchButton(mark, memory, settings) : undefined;
+  return mark.length === 1 || followsChoice(memory) ? noSuchButton(mark, memory, settings) : undefined;
+}
+
+/** After a choice a number may repeat one of its figures, which is no reading. */
+function followsChoice({ lastButtons, remembered }: Memory): boolean {
+  return lastButtons.some((key) => parseKey(key)?.does === 'c') || remembered.at(-1)?.chosen === true;
 }
 
 function answerChosen(
