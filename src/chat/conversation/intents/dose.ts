@@ -109,7 +109,6 @@ function choice(reading: Reading, answer: DoseAnswer, turn: Turn): Outcome {
   const { manner, number } = turn;
   const additive = additiveOf(reading);
   const vessel = vesselText(reading);
-  const inFull = additive !== undefined && !turn.cautioned.has(additive.id);
   const ph = numberText(reading.fields.ph ?? 0, 2, manner.mark);
   return {
     answer,
@@ -123,10 +122,11 @@ function choice(reading: Reading, answer: DoseAnswer, turn: Turn): Outcome {
       ...assumedLines(reading, manner),
       ...basisLines(reading, answer, manner),
       ...warningLines(answer.warnings, manner, 'warning', SAID_BY_THE_CHOICE),
-      ...(additive === undefined ? [] : cautionLines(additive, inFull)),
+      // Under a choice there is no button `Safety`.
+      ...(additive === undefined ? [] : cautionLines(additive, true)),
     ],
     buttons: choiceButtons(number, answer.choices ?? [], redFigures(answer) !== undefined, manner),
-    ...(inFull && { cautioned: additive.id }),
+    ...(additive && { cautioned: additive.id }),
   };
 }
 
