@@ -62,11 +62,13 @@ export function makeSay(sources: LocaleSources): Say {
     const sayLine = (line: Line): string => withCapital(format(chain(line.language ?? reply.language), line));
     const labelOf = (button: Reply['buttons'][number]): string =>
       format(chain(reply.language), { key: button.label, values: button.values });
+    const lines = reply.lines.map((line) => ({ line, text: sayLine(line) }));
+    const hasMore = reply.buttons.some(({ label }) => label === 'button-more');
     return {
-      text: fold(
-        reply.lines.map((line) => ({ line, text: sayLine(line) })),
-        () => format(chain(reply.language), { key: 'folded', values: {} }),
-      ),
+      // What is folded away stands behind the button `More`: without it nothing is.
+      text: hasMore
+        ? fold(lines, () => format(chain(reply.language), { key: 'folded', values: {} }))
+        : lines.map(({ text }) => text).join('\n'),
       buttons: reply.buttons.map((button) => ({
         key: button.key,
         mark: button.mark,

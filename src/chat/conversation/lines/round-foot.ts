@@ -98,7 +98,7 @@ function lowLines(said: readonly SaidInRound[]): Line[] {
     doseOf(one)?.warnings.some(({ code }) => code === 'free-low-may-bind-all'),
   );
   return listLine(
-    'warning',
+    'caution', // never folded away: a round has no button `More`
     'round-low',
     low.map(({ name }) => part('round-name', { name })),
   );
