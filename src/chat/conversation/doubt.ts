@@ -60,6 +60,14 @@ function askedFor(reading: Reading): Asked | undefined {
   }
 }
 
+/** A figure alone where the volume is missing: it is most likely that, but only its unit tells. */
+function ofLoneFigure({ volume_L, mass_g, target }: Fields, about: string): Asked | undefined {
+  if (!/^\d+([.,]\d+)?$/.test(about.trim()) || volume_L !== undefined || mass_g !== undefined)
+    return undefined;
+  const settledBy: FieldName[] = ['volume_L', 'total_mg_L', ...(target ? [] : (['target'] as const))];
+  return { field: 'volume_L', settledBy, byBareNumber: false };
+}
+
 function ofAmbiguous(reading: Reading, about: string): Asked | undefined {
   if (asksEachOrTotal(reading, about))
     return { field: 'volume_L', settledBy: ['volume_L'], byBareNumber: false };
@@ -88,11 +96,12 @@ function ofAmbiguous(reading: Reading, about: string): Asked | undefined {
       return { field: 'strength_percent', settledBy: ['strength_percent'], byBareNumber: true };
     case 'water':
       return { field: 'strength_percent', settledBy: ['strength_percent', 'additive'], byBareNumber: true };
+    case 'other':
+      return ofLoneFigure(fields, about);
     case 'thousands':
     case 'percent':
     case 'SO2-percent':
     case 'degree':
-    case 'other':
       return undefined;
   }
 }
