@@ -94,6 +94,7 @@ dose-tablets = { take } { measured }
 dose-gas = { weigh } { $amount } SO2 gas{ for-each }: trained people only, breathing apparatus at hand, by mass only
 dose-in-all = For all { $count }: { $list }.
 in-all-stock = { $amount } of the { $strength } % solution
+dose-tablet-too-large = { at }half a tablet{ for-each } is already too much.
 dose-tablets-give = The tablets alone give { $gives } of { $wanted } { $unit }.
 dose-stock = Or { $amount } of a { $strength } % stock of it{ for-each }.
 dose-only-stock = { measure } { $amount } of { $strength } % { additive }{ for-each }
@@ -263,6 +264,11 @@ fact-product = { $product ->
 fact-organic = organic
 fact-stage = { stage-now }
 fact-target = aim { target }
+fact-tablet =
+    { $additive ->
+        [tablet] effervescent tablets of { $size } g SO2
+       *[other] tablets of { $size } g { additive }
+    }
 fact-strength =
     { $kind ->
         [assay] { additive }, { $strength } % as purity
@@ -566,7 +572,12 @@ round-dose-bare = { at }{ round-amount }
 round-amount =
     { $unit ->
         [tablets] { $amount } tablets{ round-of }{ round-all }{ round-if-red }
-       *[other] { $amount }{ round-of }{ round-all }{ round-if-red }
+       *[other] { round-tablet }{ $amount }{ round-of }{ round-all }{ round-if-red }
+    }
+round-tablet =
+    { $tablet ->
+        [too-large] half a tablet is too much,{" "}
+       *[fits] {""}
     }
 round-of =
     { $additive ->

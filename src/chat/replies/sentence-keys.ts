@@ -106,6 +106,7 @@ export interface SentenceValues {
   'dose-rate-bare': 'dose' | 'vessel';
   'dose-rest-as-stock': 'additive' | 'amount' | 'count' | 'strength';
   'dose-stock': 'amount' | 'count' | 'strength';
+  'dose-tablet-too-large': 'count' | 'vessel';
   'dose-tablets': 'additive' | 'amount' | 'count' | 'size' | 'strength' | 'unit' | 'vessel';
   'dose-tablets-give': 'gives' | 'unit' | 'wanted';
   'dose-too-fine': 'short' | 'vessel';
@@ -141,6 +142,7 @@ export interface SentenceValues {
   'fact-strength': 'additive' | 'kind' | 'strength';
   'fact-style': 'style';
   'fact-sugar': 'sugar';
+  'fact-tablet': 'additive' | 'size';
   'fact-target': 'kind' | 'value';
   'fact-temperature': 'celsius';
   'fact-total': 'total';
@@ -212,10 +214,12 @@ export interface SentenceValues {
   'refused-ammonium-must': 'stage';
   'round-again': never;
   'round-all': 'all';
-  'round-amount': 'additive' | 'all' | 'amount' | 'red' | 'redAmount' | 'strength' | 'unit';
+  'round-amount': 'additive' | 'all' | 'amount' | 'red' | 'redAmount' | 'strength' | 'tablet' | 'unit';
   'round-choice': 'ph' | 'vessel';
-  'round-dose': 'additive' | 'all' | 'amount' | 'list' | 'red' | 'redAmount' | 'strength' | 'unit' | 'vessel';
-  'round-dose-bare': 'additive' | 'all' | 'amount' | 'red' | 'redAmount' | 'strength' | 'unit' | 'vessel';
+  'round-dose':
+    'additive' | 'all' | 'amount' | 'list' | 'red' | 'redAmount' | 'strength' | 'tablet' | 'unit' | 'vessel';
+  'round-dose-bare':
+    'additive' | 'all' | 'amount' | 'red' | 'redAmount' | 'strength' | 'tablet' | 'unit' | 'vessel';
   'round-effect': never;
   'round-for-all': 'list';
   'round-head': 'additive' | 'kind' | 'size';
@@ -233,6 +237,7 @@ export interface SentenceValues {
   'round-stock': 'list' | 'strength';
   'round-stock-of': 'amount' | 'vessel';
   'round-strength': 'size';
+  'round-tablet': 'tablet';
   'round-target-stage': 'vessel';
   'safety-head': 'additive';
   'salt-name': 'named';

@@ -1,3 +1,5 @@
+import type { AdditiveId } from '../../../core/additives/additive-id.ts';
+import { ADDITIVES } from '../../../core/additives/additives.ts';
 import type { Reading } from '../../reader/understood.ts';
 import type { Line } from '../../replies/reply.ts';
 import { volumeText } from '../../replies/volume-text.ts';
@@ -25,8 +27,9 @@ export function assumedLines(reading: Reading, manner: Manner, weighs = true): L
 function filledIn(reading: Reading, manner: Manner, weighs: boolean): Part[] {
   const { assumed, fields, asks } = reading;
   const parts: Part[] = [];
-  if (weighs && assumed.additive !== undefined && !asks.includes('additive'))
-    parts.push(part('assumed-additive', { additive: assumed.additive }));
+  const additive = assumed.additive ?? powderWithoutPurity(reading);
+  if (weighs && additive !== undefined && !asks.includes('additive'))
+    parts.push(part('assumed-additive', { additive }));
   if (assumed.target) parts.push(part(targetKey(fields), targetValues(assumed.target, manner)));
   if (assumed.gallon) parts.push(part('assumed-gallon', { gallon: assumed.gallon }));
   if (assumed.volume_L !== undefined)
@@ -37,6 +40,14 @@ function filledIn(reading: Reading, manner: Manner, weighs: boolean): Part[] {
       }),
     );
   return parts;
+}
+
+/** A powder that was named without its purity is reckoned as pure too. */
+function powderWithoutPurity({ intent, fields, marks }: Reading): AdditiveId | undefined {
+  const { additive, strength_percent, tablet_salt_g } = fields;
+  if (additive === undefined || ADDITIVES[additive].kind !== 'powder' || marks.campden) return undefined;
+  if (strength_percent !== undefined || tablet_salt_g !== undefined) return undefined;
+  return intent === 'dose' || intent === 'effect' || intent === 'added' ? additive : undefined;
 }
 
 function targetKey(fields: Reading['fields']): SentenceKey {

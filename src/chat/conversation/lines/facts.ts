@@ -47,6 +47,7 @@ function wordsOf(fields: Fields, manner: Manner): Part[] {
   if (fields.organic) words.push(part('fact-organic'));
   if (fields.stage) words.push(part('fact-stage', { stage: fields.stage }));
   if (fields.target) words.push(part('fact-target', targetValues(fields.target, manner)));
+  words.push(...tabletOf(fields, manner));
   if (fields.additive !== undefined && fields.strength_percent !== undefined)
     words.push(
       part('fact-strength', {
@@ -56,6 +57,13 @@ function wordsOf(fields: Fields, manner: Manner): Part[] {
       }),
     );
   return words;
+}
+
+/** The tablet at hand, which the amount does not name where even half of it is too much. */
+function tabletOf({ additive, tablet_SO2_g, tablet_salt_g }: Fields, { mark }: Manner): Part[] {
+  const size = tablet_SO2_g ?? tablet_salt_g;
+  if (additive === undefined || size === undefined) return [];
+  return [part('fact-tablet', { additive, size: numberText(size, 2, mark) })];
 }
 
 /** How a strength was read; a bisulfite's has a note of its own among the assumptions. */

@@ -34,6 +34,9 @@ export function firstOfDose(
   const amount = measuredAmount(answer, additive, manner);
   const lines: Line[] = [];
   if (measure && amount) lines.push(line('first', sentenceFor(additive, measure), { vessel, ...amount }));
+  const size = additive.tablet_SO2_g ?? additive.tablet_salt_g;
+  if (stock && !measure && size !== undefined)
+    lines.push(line('first', 'dose-tablet-too-large', { vessel, count: each ? 'several' : 'one' }));
   if (stock) {
     lines.push(
       line('first', stockSentence(measure), {

@@ -31,6 +31,7 @@ export function roundDoseLine(
     unit: amount.unit === 'tablets' ? 'tablets' : 'other',
     additive: asStock?.additive ?? additive?.id ?? 'none',
     strength: strength === undefined ? 'none' : numberText(strength, 2, manner.mark),
+    tablet: asStock === undefined ? 'fits' : 'too-large',
     all: each && measure && shown ? measureText(measure, manner.mark) : 'none',
     ...redOf(answer, manner),
   };
@@ -64,7 +65,7 @@ function withReadBack(
 /** What was read of one vessel, short: its volume, pH and free SO2 as bare figures, the rest by name. */
 function readBack(own: Reading, manner: Manner): Part[] {
   return factsOf(own, manner)
-    .filter(({ key }) => key !== 'fact-strength')
+    .filter(({ key }) => key !== 'fact-strength' && key !== 'fact-tablet')
     .map((fact): Part => {
       if (fact.key === 'fact-ph') return part('fact-figure', { figure: fact.values['ph'] ?? '' });
       if (fact.key === 'fact-free' && own.fields.ph !== undefined)

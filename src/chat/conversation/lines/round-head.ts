@@ -21,7 +21,9 @@ const NOTHING: Omit<Reading, 'fields'> = {
 
 /** What holds for every vessel of a round, once above its lines: the additive to take, and what the first line said. */
 export function roundHead(additive: AdditiveAtHand | undefined, shared: Fields, manner: Manner): Line[] {
-  const facts = factsOf({ ...NOTHING, fields: shared }, manner).filter(({ key }) => key !== 'fact-strength');
+  const facts = factsOf({ ...NOTHING, fields: shared }, manner).filter(
+    ({ key }) => key !== 'fact-strength' && key !== 'fact-tablet',
+  );
   const forAll = listLine('first', 'round-for-all', [...facts, ...bindingParts(shared, manner)]);
   if (additive === undefined) return forAll;
   const { kind } = ADDITIVES[additive.id];
