@@ -65,6 +65,16 @@ function totalFault({ free_mg_L, total_mg_L }: Fields): Fault[] {
   return [{ problem, about: ['free_mg_L', 'total_mg_L'] }];
 }
 
+/** An allowance and a share that binds are two ways to say one thing. */
+function bindingFault({ binding_allowance_percent: allowance, binding_share: share }: Fields): Fault[] {
+  if (allowance === undefined || share === undefined) return [];
+  const problem = {
+    code: 'conflicting-values',
+    about: `+${allowance}% / ${Number(share.toPrecision(3))}`,
+  } as const;
+  return [{ problem, about: ['binding_allowance_percent', 'binding_share'] }];
+}
+
 /**
  * A reading whose figures fit each other also where they were said apart: in an answer to a question, in the first line
  * of a round. One that does not gets the problem, loses the figures it is about, and asks nothing.
@@ -78,6 +88,7 @@ export function checkFields(reading: Reading, shared: Fields = {}): Reading {
     ...targetFault(fields.target),
     ...strengthFault(fields, whole),
     ...totalFault(fields),
+    ...bindingFault(fields),
   ];
   if (faults.length === 0) return reading;
   const about = faults.flatMap((fault) => fault.about);

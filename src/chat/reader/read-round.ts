@@ -1,5 +1,5 @@
 import type { Board } from './board.ts';
-import { isFree } from './board.ts';
+import { isFree, placeOf } from './board.ts';
 import { finishReading } from './finish-reading.ts';
 import { readDraft } from './read-draft.ts';
 import type { Term } from './split-terms.ts';
@@ -51,15 +51,21 @@ function isRound(lines: readonly LineRead[]): boolean {
   return vessels.length >= 2 || lines.filter(({ hasVolume }) => hasVolume).length >= 2;
 }
 
-const NOT_UNDERSTOOD: Draft = {
-  intent: 'chat',
-  fields: {},
-  problems: [{ code: 'not-understood', about: '' }],
-  setAside: [],
-  notes: [],
-  marks: {},
-  where: {},
-};
+/** A line with figures that nothing could read, quoted. */
+function notUnderstood(board: Board): Reading {
+  const about = placeOf(board, 0, board.terms.length - 1).text;
+  return {
+    intent: 'chat',
+    fields: {},
+    assumed: {},
+    asks: [],
+    problems: [{ code: 'not-understood', about }],
+    setAside: [],
+    notes: [],
+    marks: {},
+    where: {},
+  };
+}
 
 const carriesFacts = ({ draft }: LineRead): boolean =>
   Object.keys(draft.fields).length > 0 || Object.keys(draft.marks).length > 0;
@@ -90,15 +96,15 @@ function withShared(draft: Draft, shared: Draft | undefined): Draft {
 const isSum = ({ terms, hasVolume }: LineRead): boolean =>
   hasVolume && termIn(terms, 0).tags.includes('label:total');
 
-/** The lines of each reading: one that opens it and those below; an empty one for figures nobody can read. */
+/** The lines of each reading: one that opens it and those below; a line that nobody can read is one of its own. */
 function groupsOf(lines: readonly LineRead[], opens: (line: LineRead) => boolean): LineRead[][] {
   const groups: LineRead[][] = [];
   for (const [i, line] of lines.entries()) {
     const last = groups.at(-1);
     if (opens(line)) groups.push([line]);
     else if (isSum(line)) continue;
-    else if (i > 0 && line.draft.intent !== 'chat' && last && last.length > 0) last.push(line);
-    else if (i > 0 && line.leftover) groups.push([]);
+    else if (i > 0 && line.draft.intent !== 'chat' && last && !last[0]?.leftover) last.push(line);
+    else if (i > 0 && line.leftover) groups.push([line]);
   }
   return groups;
 }
@@ -136,7 +142,8 @@ export function readRound(
   const shared = isShared ? { ...first.draft, fields: sharedFields(first.draft.fields) } : undefined;
   const readings = groupsOf(read, opens).map((group): Reading => {
     const [line] = group;
-    if (!line) return { ...NOT_UNDERSTOOD, assumed: {}, asks: [] };
+    if (!line) return notUnderstood(setBoard([]));
+    if (line.leftover) return notUnderstood(setBoard(line.terms));
     const draft = group.length === 1 && !isPast ? line.draft : readTogether(group, setBoard, isPast);
     return finishReading(withShared(draft, shared), settings, shared?.fields);
   });

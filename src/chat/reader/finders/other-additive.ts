@@ -37,7 +37,7 @@ const isPlainWord = (board: Board, i: number): boolean => {
 /** Another chemical beside a sulfite: named as not used; in a solution with water it is refused, for acid or chlorine sets gas free. */
 function nameOnly(board: Board, i: number): void {
   if (board.marks.solutionUse !== undefined) return refuseWord(board, i);
-  if (!isPassedOver(board, i)) setAside(board, i, i);
+  if (!isPassedOver(board, i) && !isCue(board, i, 'salt-word')) setAside(board, i, i);
 }
 
 /** `no sorbate`, `after bentonite`, `sorbate yesterday`: talk of it, and no wish to add it now. */
