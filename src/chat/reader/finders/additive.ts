@@ -154,6 +154,30 @@ function findBareSO2(board: Board, i: number): void {
     findKnown(board, i, 'sulfur-dioxide-solution');
 }
 
+/** `sulfite powder`, `sulfite stock`: something with SO2 in it whose name nobody has said. */
+function findUnnamed(board: Board, i: number, isSolution: boolean): void {
+  const strength = strengthNear(board, i);
+  board.marks.unnamedAdditive = true;
+  if (isSolution) board.marks.unnamedSolution = true;
+  claim(board, i, i);
+  if (strength && strength.percent <= 25)
+    find(board, 'strength_percent', strength.percent, 'labelled', strength.from, strength.to);
+  else if (strength) claim(board, strength.from, strength.to);
+}
+
+/** `10% stock`, apart from any name: the per cent is the strength of a solution, and no wine's alcohol. */
+function findNamelessStock(board: Board): void {
+  if (board.marks.unnamedAdditive === true || findingOf(board, 'strength_percent') !== undefined) return;
+  const at = board.terms.findIndex((_, i) => {
+    const isName = isCue(board, i, 'solution') && board.taken[i] !== true;
+    return isName && strengthNear(board, i)?.perLitre === false;
+  });
+  const named = findingOf(board, 'additive')?.value;
+  if (at < 0) return;
+  if (named === undefined) findUnnamed(board, at, true);
+  else if (isPowder(named)) findKnown(board, at, named);
+}
+
 /** Finds the additive and its strength. Powder or solution: the word, or a strength up to 25 %, tells. */
 export function findAdditive(board: Board): void {
   for (let i = 0; i < board.terms.length; i++) {
@@ -161,14 +185,7 @@ export function findAdditive(board: Board): void {
     const id = KNOWN.find((one) => hasTag(board, i, `additive:${one}`));
     if (id) findKnown(board, i, id);
     else if (hasTag(board, i, 'label:so2')) findBareSO2(board, i);
-    else if (hasTag(board, i, 'additive:unnamed')) {
-      const strength = strengthNear(board, i);
-      board.marks.unnamedAdditive = true;
-      if (isCue(board, i, 'solution-name')) board.marks.unnamedSolution = true;
-      claim(board, i, i);
-      if (strength && strength.percent <= 25)
-        find(board, 'strength_percent', strength.percent, 'labelled', strength.from, strength.to);
-      else if (strength) claim(board, strength.from, strength.to);
-    }
+    else if (hasTag(board, i, 'additive:unnamed')) findUnnamed(board, i, isCue(board, i, 'solution-name'));
   }
+  findNamelessStock(board);
 }
