@@ -2,6 +2,7 @@ import type { Board } from './board.ts';
 import { recogniseEmergency } from './emergency.ts';
 import { finishReading } from './finish-reading.ts';
 import type { FoldedText } from './fold-text.ts';
+import { emptyReading } from './empty-reading.ts';
 import { foldText } from './fold-text.ts';
 import { joinNumbers } from './join-numbers.ts';
 import { LEXICON } from './lexicon.ts';
@@ -12,7 +13,7 @@ import { readRound } from './read-round.ts';
 import type { Term } from './split-terms.ts';
 import { splitTerms } from './split-terms.ts';
 import { isStrange, topicOf } from './topic.ts';
-import type { AwaitedField, Draft, Reading, ReaderSettings, Understood } from './understood.ts';
+import type { AwaitedField, Reading, ReaderSettings, Understood } from './understood.ts';
 import { readWaiting } from './waiting-answer.ts';
 import type { Tag } from './words/words.ts';
 
@@ -61,27 +62,14 @@ export function setBoard(
   };
 }
 
-const empty = (intent: Reading['intent'], more: Partial<Draft> = {}): Reading => ({
-  intent,
-  fields: {},
-  assumed: {},
-  asks: [],
-  problems: [],
-  setAside: [],
-  notes: [],
-  marks: {},
-  where: {},
-  ...more,
-});
-
 function readOne(board: Board, settings: ReaderSettings): Reading {
   const draft = readDraft(board);
   if (draft.intent !== 'chat') return finishReading(draft, settings);
   const topic = topicOf(board);
-  if (topic !== undefined) return empty('chat', { topic });
+  if (topic !== undefined) return emptyReading('chat', { topic });
   const problems =
     isStrange(board) && board.findings.length === 0 ? [{ code: 'not-understood' as const, about: '' }] : [];
-  return empty('chat', { problems, notes: draft.notes });
+  return emptyReading('chat', { problems, notes: draft.notes });
 }
 
 /**
@@ -108,12 +96,12 @@ export function readMessage(text: string, settings: ReaderSettings, waiting?: Aw
   if (text.length > LONGEST_MESSAGE) {
     const danger = recogniseEmergency(foldText(text.slice(0, LONGEST_MESSAGE)).text, settings.language);
     return danger
-      ? understood([empty('emergency', { topic: danger.danger })], {}, danger.language)
-      : understood([empty('chat', { problems: [{ code: 'too-long', about: '' }] })]);
+      ? understood([emptyReading('emergency', { topic: danger.danger })], {}, danger.language)
+      : understood([emptyReading('chat', { problems: [{ code: 'too-long', about: '' }] })]);
   }
   const folded = foldText(text);
   const danger = recogniseEmergency(folded.text, settings.language);
-  if (danger) return understood([empty('emergency', { topic: danger.danger })], {}, danger.language);
+  if (danger) return understood([emptyReading('emergency', { topic: danger.danger })], {}, danger.language);
   const answer = waiting && readWaiting(folded.text.trim(), waiting, settings);
   if (answer) return understood([answer]);
   const terms = joinNumbers(splitTerms(folded, LEXICON));

@@ -1,19 +1,10 @@
 import { describe, expect, test } from 'vitest';
 import { checkFields } from '../../../src/chat/conversation/check-fields.ts';
+import { emptyReading } from '../../../src/chat/reader/empty-reading.ts';
 import type { Fields, Reading } from '../../../src/chat/reader/understood.ts';
 
-const reading = (fields: Fields, more: Partial<Reading> = {}): Reading => ({
-  intent: 'dose',
-  fields,
-  assumed: {},
-  asks: ['volume_L'],
-  problems: [],
-  setAside: [],
-  notes: [],
-  marks: {},
-  where: {},
-  ...more,
-});
+const reading = (fields: Fields, more: Partial<Reading> = {}): Reading =>
+  emptyReading('dose', { fields, asks: ['volume_L'], ...more });
 
 describe('figures that were said apart must fit each other', () => {
   test.each<[Fields, string[]]>([

@@ -1,20 +1,10 @@
 import { describe, expect, test } from 'vitest';
-import type { Reading } from '../../../src/chat/reader/understood.ts';
+import { emptyReading } from '../../../src/chat/reader/empty-reading.ts';
 import { waitsFor } from '../../../src/chat/conversation/waiting.ts';
 import { startTalk, textOf } from './talk.ts';
 
 const MINUTE_ms = 60_000;
-const READING: Reading = {
-  intent: 'dose',
-  fields: {},
-  assumed: {},
-  asks: [],
-  problems: [],
-  setAside: [],
-  notes: [],
-  marks: {},
-  where: {},
-};
+const READING = emptyReading('dose');
 const fieldsAfter = (...messages: readonly string[]): unknown => {
   const talk = startTalk();
   return messages.map((text) => talk.write(text)).at(-1)?.understood?.readings[0]?.fields;

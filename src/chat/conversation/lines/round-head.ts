@@ -1,6 +1,7 @@
 import type { AdditiveAtHand } from '../../../core/additives/additive-id.ts';
 import { ADDITIVES } from '../../../core/additives/additives.ts';
-import type { Fields, Reading } from '../../reader/understood.ts';
+import { emptyReading } from '../../reader/empty-reading.ts';
+import type { Fields } from '../../reader/understood.ts';
 import { numberText } from '../../replies/number-text.ts';
 import type { Line } from '../../replies/reply.ts';
 import type { Manner } from '../manner.ts';
@@ -8,20 +9,9 @@ import { factsOf } from './facts.ts';
 import { line, listLine } from './line.ts';
 import { bindingParts } from './round-dose.ts';
 
-const NOTHING: Omit<Reading, 'fields'> = {
-  intent: 'dose',
-  assumed: {},
-  asks: [],
-  problems: [],
-  setAside: [],
-  notes: [],
-  marks: {},
-  where: {},
-};
-
 /** What holds for every vessel of a round, once above its lines: the additive to take, and what the first line said. */
 export function roundHead(additive: AdditiveAtHand | undefined, shared: Fields, manner: Manner): Line[] {
-  const facts = factsOf({ ...NOTHING, fields: shared }, manner).filter(
+  const facts = factsOf(emptyReading('dose', { fields: shared }), manner).filter(
     ({ key }) => key !== 'fact-strength' && key !== 'fact-tablet',
   );
   const forAll = listLine('first', 'round-for-all', [...facts, ...bindingParts(shared, manner)]);
