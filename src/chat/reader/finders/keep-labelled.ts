@@ -1,4 +1,4 @@
-import { celsiusFrom } from '../../../core/units/temperature.ts';
+import { celsiusSaid } from '../celsius-said.ts';
 import type { Board, Said } from '../board.ts';
 import { decimalAt, figureAt, find, hasTag, isMark, placeOf, refuse } from '../board.ts';
 import type { LabelId } from '../words/words.ts';
@@ -56,7 +56,7 @@ export function keepFigure(board: Board, label: LabelId, beside: Beside, from: n
     find(
       board,
       'temperature_C',
-      celsiusFrom(figure.value, unit ?? board.settings.temperatureUnit),
+      celsiusSaid(figure.value, unit ?? board.settings.temperatureUnit),
       said,
       from,
       to,

@@ -1,4 +1,4 @@
-import { celsiusFrom } from '../../../core/units/temperature.ts';
+import { celsiusSaid } from '../celsius-said.ts';
 import type { Board } from '../board.ts';
 import { figureAt, find, hasTag, isCue, isFree, isMark, refuse, termAt, setAside } from '../board.ts';
 import { isStranger } from '../stranger.ts';
@@ -46,7 +46,7 @@ function findDegrees(board: Board, i: number): void {
   const { value, from } = figureAt(board, i);
   if (unit && (isCue(board, i - 1, 'to') || isCue(board, i - 1, 'target'))) return setAside(board, i - 1, at);
   if (unit === 'F' && !sign && termAt(board, at).gap && value < 40) return;
-  if (unit) find(board, 'temperature_C', celsiusFrom(value, unit), 'unit', from, at);
+  if (unit) find(board, 'temperature_C', celsiusSaid(value, unit), 'unit', from, at);
   else if (sign && hasTag(board, at, 'label:alcohol'))
     find(board, 'alcohol_percent', value, 'labelled', i, at);
   else if (sign) refuse(board, 'ambiguous-number', i, i + 1);
