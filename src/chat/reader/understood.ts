@@ -1,5 +1,6 @@
 import type { AdditiveId } from '../../core/additives/additive-id.ts';
 import type { Problem } from '../../core/problem.ts';
+import type { Command, SaidWhen } from './command.ts';
 import type { Category, Product, Stage, Style, Target } from '../../core/wine.ts';
 
 /** The languages of the message language, by their ISO 639-1 codes. */
@@ -153,6 +154,14 @@ export interface Reading {
   /** How many equal barrels or vessels `volume_L` is the sum of (`6 barrels`, `40 x 225 L`). */
   readonly containers?: number;
   readonly concentrationUnit?: 'ppm' | 'mg/L' | 'g/hL';
+  /** One of the bot's own words, or a statement about a vessel; only with the intent `command`. */
+  readonly command?: Command;
+  /** When it happened or was sampled, as it was said. */
+  readonly when?: SaidWhen;
+  /** The lot on the additive's label. */
+  readonly chemical_lot?: string;
+  /** A remark for the log, in the person's words. */
+  readonly remark?: string;
   /** What else was read that steers what is asked. */
   readonly marks: Readonly<Marks>;
   readonly where: Readonly<Partial<Record<FieldName, Place>>>;

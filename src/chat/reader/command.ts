@@ -1,0 +1,86 @@
+import type { AdditiveId } from '../../core/additives/additive-id.ts';
+import type { Basis } from '../../core/wine.ts';
+
+/** A day as it was said; what it is on the calendar depends on when and where it was said. */
+export type SaidDay =
+  | { readonly is: 'today' }
+  | { readonly is: 'yesterday' }
+  | { readonly is: 'before-yesterday' }
+  /** The last such day before today; 1 is Monday. */
+  | { readonly is: 'weekday'; readonly weekday: number }
+  /** Without a year the last such date that is not in the future. */
+  | { readonly is: 'date'; readonly day: number; readonly month: number; readonly year?: number };
+
+/** A moment as it was said: a day, an hour of the clock (0–23) and minute, or so many hours ago. */
+export interface SaidWhen {
+  readonly day?: SaidDay;
+  readonly hour?: number;
+  readonly minute?: number;
+  readonly hours_ago?: number;
+  /** The person's own words. */
+  readonly text: string;
+}
+
+/** Something that is set for the cellar. */
+export type Setting =
+  | { readonly of: 'units'; readonly units: 'metric' | 'us' | 'imperial' }
+  | {
+      readonly of: 'usual-additive';
+      readonly additive: AdditiveId;
+      readonly strength_percent?: number;
+      readonly strength_of?: 'salt';
+    }
+  | { readonly of: 'target'; readonly style: 'red' | 'white' | 'sweet'; readonly molecular_mg_L: number }
+  | { readonly of: 'quiet'; readonly from_minute: number; readonly to_minute: number }
+  | { readonly of: 'daily'; readonly at_minute: number }
+  | { readonly of: 'daily'; readonly at_minute: 'off' }
+  | { readonly of: 'zone'; readonly zone: string }
+  | { readonly of: 'allowance'; readonly percent: number }
+  | { readonly of: 'basis'; readonly basis: Basis }
+  | { readonly of: 'short-replies'; readonly on: boolean }
+  | { readonly of: 'ph-days'; readonly days: number }
+  | { readonly of: 'check-days'; readonly of_what: 'usual' | 'often'; readonly days: number };
+
+/** Which entries are taken away. */
+export type Span =
+  | { readonly is: 'month' } // this month
+  | { readonly is: 'last-month' }
+  | { readonly is: 'year'; readonly year?: number }
+  | { readonly is: 'between'; readonly from: SaidDay; readonly to: SaidDay }
+  | { readonly is: 'all' };
+
+/**
+ * One of the bot's own words, or a statement about a vessel. The vessel it is about, a volume, a style, a stage, an
+ * amount stand in the reading's fields.
+ */
+export type Command =
+  | { readonly name: 'vessel' } // T4?
+  | { readonly name: 'vessels' }
+  | { readonly name: 'day'; readonly day: SaidDay }
+  | { readonly name: 'history' }
+  | { readonly name: 'undo' }
+  | { readonly name: 'strike'; readonly entry: number; readonly reason: string }
+  | { readonly name: 'order' }
+  | { readonly name: 'open' }
+  | { readonly name: 'due' }
+  | { readonly name: 'later'; readonly days: number }
+  | { readonly name: 'unwatch' } // not T4
+  | { readonly name: 'watch' }
+  | { readonly name: 'settings' }
+  | { readonly name: 'set'; readonly setting: Setting }
+  /** A setting whose value cannot be; `about` is what was written. */
+  | { readonly name: 'set-wrong'; readonly of: Setting['of']; readonly about: string }
+  | { readonly name: 'export'; readonly span: Span; readonly format?: 'csv' | 'xlsx' }
+  | { readonly name: 'import'; readonly file: string }
+  | { readonly name: 'backup' }
+  | { readonly name: 'forget-me' }
+  | { readonly name: 'forget' }
+  | { readonly name: 'told' } // T4 red; T4 is 5200 L now; T4 in malo
+  | { readonly name: 'capacity' } // T4 holds 6000 L: the litres are in `volume_L`
+  | { readonly name: 'racked' }
+  | { readonly name: 'topped' }
+  | { readonly name: 'acid' }
+  | { readonly name: 'moved'; readonly to: string } // `volume_L` where only a part was moved
+  | { readonly name: 'blended'; readonly to: string }
+  | { readonly name: 'emptied' }
+  | { readonly name: 'lot'; readonly lot: string };
