@@ -5,9 +5,9 @@ import { parse, sourceFiles } from './source-file.ts';
 import type { SourceFile } from './source-file.ts';
 
 /** Inside `src/core` a room uses only rooms above it, so that a figure is never computed from what needs it. */
-const CORE_ROOMS = ['', 'units', 'chemistry', 'additives', 'binding', 'limits', 'dose'];
+const CORE_ROOMS = ['', 'units', 'chemistry', 'additives', 'binding', 'limits', 'dose', 'time', 'cellar'];
 /** Reading knows nothing of answering, and wording nothing of what decides. */
-const CHAT_ROOMS = ['reader', 'replies', 'conversation'];
+const CHAT_ROOMS = ['reader', 'replies', 'attachments', 'conversation'];
 /** Programs: they start things, so nobody imports them. */
 const PROGRAMS = ['src/main.ts', 'src/ask.ts'];
 const STOREYS = ['core', 'chat', 'edge', 'program'];
@@ -18,6 +18,11 @@ const PACKAGES: readonly { readonly name: RegExp; readonly in: RegExp; readonly 
     name: /^mathjs(\/|$)/,
     in: /^src\/core\/units\//,
     why: 'one door to mathjs: no word of a user reaches it',
+  },
+  {
+    name: /^@date-fns\/tz(\/|$)/,
+    in: /^src\/core\/time\/offset-at\.ts$/,
+    why: 'one door to what a zone does: everything else is arithmetic',
   },
   {
     name: /^node:/,

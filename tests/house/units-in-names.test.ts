@@ -8,7 +8,7 @@ import { UNIT_WORD } from './unit-words.ts';
 
 /** A unit at the end of a name. */
 const UNIT =
-  /(^|_)(L|hL|mL|g|kg|mg|mol|C|F|K|percent|share|ms|s|pK|mg_L|g_L|g_hL|mol_L|g_mol|(g|L|mL|mg)_per_[0-9A-Za-z_]+)(_[a-z]+)?$|At$/;
+  /(^|_)(L|hL|mL|g|kg|mg|mol|C|F|K|percent|share|ms|s|pK|mg_L|g_L|g_hL|mol_L|g_mol|(g|L|mL|mg)_per_[0-9A-Za-z_]+)(_[a-z]+)?$|At$|_at$|(^|_)(days|hours|minutes?)(_[a-z]+)?$/;
 /** Pure numbers of chemistry and arithmetic, counts, and places in a text or a list. */
 const BARE = new Set([
   'ph',
@@ -45,6 +45,23 @@ const BARE = new Set([
   'position',
   'at', // a time in milliseconds since 1970, as in every `…At`
   'nextNumber',
+  'entry', // numbers of entries, and of people
+  'corrects',
+  'order',
+  'by',
+  'last', // how many of the newest
+  'last_entry',
+  'most',
+  'since', // times in milliseconds since 1970
+  'until',
+  'empty',
+  'later',
+  'year', // of a calendar or a clock
+  'month',
+  'day',
+  'weekday',
+  'hour',
+  'second',
 ]);
 
 /**

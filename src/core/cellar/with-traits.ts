@@ -1,0 +1,56 @@
+import type { Entry, WineTraits } from './entry.ts';
+import type { Known, KnownTraits, Vessel } from './vessel.ts';
+
+const TRAITS = [
+  'style',
+  'category',
+  'product',
+  'organic',
+  'stage',
+  'alcohol_percent',
+  'sugar_g_L',
+] as const satisfies readonly (keyof WineTraits)[];
+
+/**
+ * A vessel with what was told of its wine: alcohol in % vol, sugar in g/L. Wine that goes into malolactic or comes out
+ * of it has another pH from then on, so that the pH known before is void.
+ *
+ * Source: common practice, no source (malolactic fermentation raises the pH).
+ *
+ * @example
+ * ```ts
+ * import { freshVessel } from './fresh-vessel.ts';
+ * const told = { entry: 2, at: 5, key: 'k', noted_at: 5, by: 1, kind: 'vessel', event: 'told', vessels: ['tank 4'] };
+ * withTraits(freshVessel('tank 4', told), { style: 'red' }, told).traits.style?.value // => 'red'
+ * ```
+ */
+export function withTraits(vessel: Vessel, told: WineTraits, { at, entry }: Entry): Vessel {
+  const fresh = TRAITS.flatMap((name) => {
+    const value = told[name];
+    return value === undefined ? [] : [[name, { value, at, entry } satisfies Known<unknown>] as const];
+  });
+  if (fresh.length === 0) return vessel;
+  const traits: KnownTraits = { ...vessel.traits, ...Object.fromEntries(fresh) };
+  const changed = { ...vessel, traits };
+  const before = vessel.traits.stage?.value;
+  const isMalolactic = told.stage !== undefined && told.stage !== before;
+  if (!isMalolactic || (before !== 'malolactic' && told.stage !== 'malolactic')) return changed;
+  return withoutPH(changed, 'malolactic', at);
+}
+
+/**
+ * A vessel whose pH is void since an event (time in milliseconds), if it was known at all.
+ *
+ * Source: common practice, no source.
+ *
+ * @example
+ * ```ts
+ * import { freshVessel } from './fresh-vessel.ts';
+ * const known = { ...freshVessel('tank 4', { entry: 1, at: 0 }), ph: { value: 3.5, at: 0, entry: 1 } };
+ * withoutPH(known, 'acid', 7).voided.ph // => { event: 'acid', at: 7 }
+ * ```
+ */
+export function withoutPH(vessel: Vessel, event: 'malolactic' | 'acid' | 'blended', at: number): Vessel {
+  const { ph, ...others } = vessel;
+  return ph === undefined ? vessel : { ...others, voided: { ...vessel.voided, ph: { event, at } } };
+}
