@@ -663,3 +663,8 @@ button-not-finished = Not finished
 button-red = Red
 button-choice-leave = Leave it
 button-choice-to = To { $free }
+
+## What the cellar remembers
+
+fault-unwritten = Not noted: I could not write it down. Please send it again in a minute.
+vessel-new = { $vessel } is new to me: kept from now on.

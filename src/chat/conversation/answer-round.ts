@@ -8,11 +8,13 @@ import { roundHead } from './lines/round-head.ts';
 import { roundName } from './lines/round-names.ts';
 import { vesselText } from './lines/vessel.ts';
 import { mannerOf } from './manner.ts';
-import type { Memory } from './memory.ts';
-import { cautionedToday, keeping, nextMemory, type Said } from './next-memory.ts';
+import type { Here } from './here.ts';
+import { cautionedToday, keeping, nextMemory, refAt, remembering, type Said } from './next-memory.ts';
+import { noting } from './note.ts';
+import { notesOfReading } from './notes-of-reading.ts';
 import type { Turn } from './outcome.ts';
-import type { Handled, IncomingMessage } from './ports.ts';
-import type { Settings } from './settings.ts';
+import type { Handled } from './ports.ts';
+import { asNoted, prepare } from './prepare.ts';
 import { additiveOf } from './to-requests.ts';
 import { withShared } from './with-shared.ts';
 
@@ -20,27 +22,27 @@ import { withShared } from './with-shared.ts';
 const VESSELS_A_MESSAGE = 25;
 
 /** A round of vessels: a line each; the stage, what was assumed and the cautions once. Nothing waits for an answer. */
-export function answerRound(
-  message: IncomingMessage,
-  understood: Understood,
-  memory: Memory,
-  settings: Settings,
-): Handled {
+export function answerRound(understood: Understood, here: Here): Handled {
+  const { message, memory, settings } = here;
   const cautioned = cautionedToday(memory, message.at);
   const text = message.content.kind === 'text' ? message.content.text : '';
   const { decimalMark, shared } = understood;
-  const additive = oneAdditive(understood);
-  const said: SaidInRound[] = understood.readings.map((own, place) => {
-    const reading = withShared(own, shared);
+  const readings = understood.readings.map((own) => prepare(withShared(own, shared), here));
+  const additive = oneAdditive(readings);
+  let nextEntry = here.nextEntry;
+  const said: SaidInRound[] = readings.map((reading, place) => {
+    const own = understood.readings[place] ?? reading;
     const manner = mannerOf(reading, decimalMark, settings);
     const name = roundName(text, own);
     const round = { own: withoutVolumeIn(own, name), isOneAdditive: additive !== undefined };
-    const number = memory.nextNumber + place;
-    const turn: Turn = { settings, manner, number, cautioned, round };
+    const ref = refAt(here, place);
+    const turn: Turn = { settings, manner, ref, cautioned, here: { ...here, nextEntry }, round };
     const outcome = answerReading(named(reading, name), understood.language, turn);
-    return { reading, outcome, name: name ?? vesselText(reading) };
+    const notes = [...notesOfReading(reading, here), ...(outcome.notes ?? [])];
+    nextEntry += notes.length;
+    return { reading: asNoted(reading), outcome, ref, notes, name: name ?? vesselText(reading) };
   });
-  const buttons = safetyButton(said, cautioned, memory.nextNumber);
+  const buttons = safetyButton(said, cautioned);
   const [first] = said;
   const head = first ? roundHead(additive, shared, mannerOf(first.reading, decimalMark, settings)) : [];
   const foot = roundFoot(said, cautioned, decimalMark, settings);
@@ -52,11 +54,19 @@ export function answerRound(
       buttons: at === 0 ? buttons : [],
     };
   });
-  const next = nextMemory(memory, message.at, understood, said, { buttons });
+  const next = nextMemory(here, understood, said, { buttons });
   return {
-    writes: keeping(message, next),
+    writes: [
+      ...noting(
+        here,
+        said.flatMap(({ notes }) => notes),
+      ),
+      ...said.flatMap(({ outcome }) => outcome.keeps ?? []),
+      ...remembering(here, said),
+      ...keeping(here, next),
+    ],
     replies,
-    understood,
+    understood: { ...understood, readings },
     answers: said.map(({ outcome }) => outcome.answer),
   };
 }
@@ -68,9 +78,8 @@ function warningsLast(lines: readonly Line[]): Line[] {
 }
 
 /** The one additive that all doses of a round take, named once above them; undefined where there are several. */
-function oneAdditive({ readings, shared }: Understood): AdditiveAtHand | undefined {
-  const whole = readings.map((one) => withShared(one, shared));
-  const doses = whole.filter(({ intent, problems }) => intent === 'dose' && problems.length === 0);
+function oneAdditive(readings: readonly Reading[]): AdditiveAtHand | undefined {
+  const doses = readings.filter(({ intent, problems }) => intent === 'dose' && problems.length === 0);
   const additives = doses.map(additiveOf).filter((one) => one !== undefined);
   const [first] = additives;
   const isOne = new Set(additives.map((one) => JSON.stringify(one))).size === 1;
@@ -92,12 +101,12 @@ function withoutVolumeIn(own: Reading, name: string | undefined): Reading {
 }
 
 /** The cautions in full, where they stand in one line as they were said before. */
-function safetyButton(said: readonly Said[], cautioned: ReadonlySet<string>, from: number): Button[] {
-  const place = said.findIndex(({ reading, outcome }) => {
+function safetyButton(said: readonly Said[], cautioned: ReadonlySet<string>): Button[] {
+  const found = said.find(({ reading, outcome }) => {
     const additive = outcome.answer === null ? undefined : additiveOf(reading);
     return additive !== undefined && cautioned.has(additive.id);
   });
-  return place < 0 ? [] : buttonsFor(from + place, ['s']);
+  return found === undefined ? [] : buttonsFor(found.ref, ['s']);
 }
 
 function chunks<T>(all: readonly T[], size: number): T[][] {

@@ -5,13 +5,19 @@ import { isBareNumber } from './bare-number.ts';
 import { belongs } from './complete.ts';
 import { questionFor } from './intents/asking.ts';
 import { line } from './lines/line.ts';
+import { newVesselLines } from './lines/new-vessel.ts';
 import { problemLines } from './lines/problems.ts';
 import { vesselText } from './lines/vessel.ts';
 import { mannerOf, type Manner } from './manner.ts';
-import type { Memory, Waiting } from './memory.ts';
-import { cautionedToday, keeping, nextMemory, waitFor } from './next-memory.ts';
+import type { Here } from './here.ts';
+import type { Waiting } from './memory.ts';
+import { cautionedToday, keeping, nextMemory, refAt, remembering, waitFor } from './next-memory.ts';
+import { noting } from './note.ts';
+import { notesOfReading } from './notes-of-reading.ts';
 import type { Outcome } from './outcome.ts';
 import type { Handled, IncomingMessage } from './ports.ts';
+import { asNoted, prepare } from './prepare.ts';
+import { asSaid } from './recall.ts';
 import type { Settings } from './settings.ts';
 import { vesselsProblem } from './vessels-in-problem.ts';
 import { stillWaiting } from './waiting.ts';
@@ -23,36 +29,42 @@ import { withShared } from './with-shared.ts';
  * @param completes whether the reading is the one that waited, with its answer
  */
 export function answerSingle(
-  message: IncomingMessage,
   understood: Understood,
-  memory: Memory,
-  settings: Settings,
-  completes = false,
+  here: Here,
+  { completes = false, chosen = false }: { readonly completes?: boolean; readonly chosen?: boolean } = {},
 ): Handled {
+  const { message, memory, settings } = here;
   const [first] = understood.readings;
   if (!first) return { writes: [], replies: [], understood, answers: [] };
-  const reading = withShared(first, understood.shared);
+  const reading = prepare(withShared(first, understood.shared), here);
   const manner = mannerOf(reading, understood.decimalMark, settings);
-  const outcome = answerReading(reading, understood.language, {
-    settings,
-    manner,
-    number: memory.nextNumber,
-    cautioned: cautionedToday(memory, message.at),
-  });
+  const ref = refAt(here);
+  const cautioned = cautionedToday(memory, message.at);
+  const outcome = answerReading(reading, understood.language, { settings, manner, ref, cautioned, here });
+  const notes = [...notesOfReading(reading, here), ...(outcome.notes ?? [])];
+  const logged = asNoted(reading);
   const before = stillWaiting(memory, message.at);
   const kept = completes && outcome.doubt ? undefined : keepsWaiting(reading, before);
   const asked = kept ? askAgain(kept, reading, outcome, manner, settings) : outcome;
-  const waiting = kept ?? waitingFor(outcome, reading, memory.nextNumber, message.at, settings);
+  const waiting = kept ?? waitingFor(outcome, logged, ref, message.at, settings);
   const muddle = vesselsProblem(textOf(message), reading, settings);
   const lines = muddle
     ? [muddle, line('question', 'problem-no-number', { again: 'correction' })]
-    : asked.lines;
+    : [...asked.lines, ...newVesselLines(reading, here, notes)];
   const reply: Reply = { language: settings.language, lines, buttons: asked.buttons };
-  const next = nextMemory(memory, message.at, understood, [{ reading, outcome }], {
-    buttons: reply.buttons,
-    waiting,
-  });
-  return { writes: keeping(message, next), replies: [reply], understood, answers: [outcome.answer] };
+  const said = [{ reading: logged, outcome, ref }];
+  const next = nextMemory(here, understood, said, { buttons: reply.buttons, waiting, chosen });
+  return {
+    writes: [
+      ...noting(here, notes),
+      ...(outcome.keeps ?? []),
+      ...remembering(here, said, chosen),
+      ...keeping(here, next),
+    ],
+    replies: [reply],
+    understood: { ...understood, readings: [reading] },
+    answers: [outcome.answer],
+  };
 }
 
 function textOf({ content }: IncomingMessage): string {
@@ -63,16 +75,16 @@ function textOf({ content }: IncomingMessage): string {
 function waitingFor(
   { waits, doubt }: Outcome,
   reading: Reading,
-  number: number,
+  ref: string,
   at: number,
   settings: Settings,
 ): Waiting | undefined {
   if (doubt !== undefined) {
     const { field, reading: kept, problems, settledBy, byBareNumber } = doubt;
-    const waiting = waitFor(field, { number, reading: kept, at }, settings);
+    const waiting = waitFor(field, { ref, reading: asSaid(kept), at }, settings);
     return { ...waiting, doubt: { problems, settledBy, byBareNumber } };
   }
-  return waits === undefined ? undefined : waitFor(waits, { number, reading, at }, settings);
+  return waits === undefined ? undefined : waitFor(waits, { ref, reading: asSaid(reading), at }, settings);
 }
 
 /** Talk in between leaves a question waiting, and so does a slip in the answer to it. */

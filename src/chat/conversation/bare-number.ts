@@ -3,9 +3,9 @@ import type { DecimalMark } from '../replies/number-text.ts';
 import { line } from './lines/line.ts';
 import { wholeExample } from './lines/whole-example.ts';
 import { mannerOf } from './manner.ts';
-import type { Memory } from './memory.ts';
+import type { Here } from './here.ts';
 import { keeping } from './next-memory.ts';
-import type { Handled, IncomingMessage } from './ports.ts';
+import type { Handled } from './ports.ts';
 import type { Settings } from './settings.ts';
 import { WAITS_ms } from './waiting.ts';
 
@@ -52,13 +52,8 @@ function additionAlone({ intent, fields, problems }: Reading): number | undefine
  * A figure alone after "no sulfite now", or after the question how much to add to must: nothing waits for it, so that
  * a figure is never taken for a dose by mistake. It is to be written whole, with the person's own vessel and volume.
  */
-export function figureAfterTarget(
-  message: IncomingMessage,
-  text: string,
-  understood: Understood,
-  memory: Memory,
-  settings: Settings,
-): Handled | undefined {
+export function figureAfterTarget(text: string, understood: Understood, here: Here): Handled | undefined {
+  const { message, memory, settings } = here;
   const { askedTarget } = memory;
   if (askedTarget === undefined || message.at - askedTarget.at > WAITS_ms) return undefined;
   const [only, another] = understood.readings;
@@ -74,7 +69,7 @@ export function figureAfterTarget(
     line('first', 'figure-alone', { text, ...wholeExample(askedTarget.reading, manner, settings, adds) }),
   ];
   return {
-    writes: keeping(message, { ...memory, lastButtons: [] }),
+    writes: keeping(here, { ...memory, lastButtons: [] }),
     replies: [{ language: settings.language, lines, buttons: [] }],
     understood: isBare ? numberAskedAbout(text, settings, decimalMark) : understood,
     answers: [null],
@@ -82,7 +77,7 @@ export function figureAfterTarget(
 }
 
 /** A number on a keyboard that no button has. */
-export function noSuchButton(text: string, memory: Memory, settings: Settings): Handled {
+export function noSuchButton(text: string, { memory, settings }: Here): Handled {
   const lines = [line('first', 'no-such-button', { text, last: String(memory.lastButtons.length) })];
   return {
     writes: [],

@@ -7,7 +7,7 @@ import type { SentenceKey } from '../replies/sentence-keys.ts';
 import { perLitre, type Manner } from './manner.ts';
 import { letterAt } from './waiting.ts';
 
-/** What a button does; its key is `does:number`, of a choice `does:number:which`. */
+/** What a button does; its key is `does:ref`, of a choice `does:ref:which`. */
 export type Does = 'w' | 's' | 't' | 'm' | 'nf' | 'red' | 'c' | 'l';
 
 /** At most so many buttons stand under a dose. */
@@ -24,9 +24,9 @@ export const LABELS = {
 } as const satisfies Partial<Record<Does, SentenceKey>>;
 
 /** The plain buttons of a remembered reading, marked 1, 2, 3 … as they stand. */
-export function buttonsFor(number: number, does: readonly (keyof typeof LABELS)[]): Button[] {
+export function buttonsFor(ref: string, does: readonly (keyof typeof LABELS)[]): Button[] {
   return does.map((one, at) => ({
-    key: `${one}:${number}`,
+    key: `${one}:${ref}`,
     mark: String(at + 1),
     label: LABELS[one],
     values: {},
@@ -44,7 +44,7 @@ export interface Applies {
  * The weightiest four under a dose: the stage, the colour, the cautions where they stand in one line, the working,
  * another target; `More` comes last and leads to all the rest.
  */
-export function doseButtons(number: number, applies: Applies): Button[] {
+export function doseButtons(ref: string, applies: Applies): Button[] {
   const all = [
     ...(applies.stageAssumed ? (['nf'] as const) : []),
     ...(applies.mayBeRed ? (['red'] as const) : []),
@@ -52,12 +52,12 @@ export function doseButtons(number: number, applies: Applies): Button[] {
     'w' as const,
     't' as const,
   ];
-  return buttonsFor(number, [...all.slice(0, MOST_BUTTONS - 1), 'm']);
+  return buttonsFor(ref, [...all.slice(0, MOST_BUTTONS - 1), 'm']);
 }
 
 /** A button for each way out of a choice that may be taken, the other colour, then all the rest. */
 export function choiceButtons(
-  number: number,
+  ref: string,
   choices: readonly DoseChoice[],
   mayBeRed: boolean,
   manner: Manner,
@@ -66,10 +66,10 @@ export function choiceButtons(
     if (choice.over_limit) return [];
     const label =
       choice.target === undefined ? ('button-choice-leave' as const) : ('button-choice-to' as const);
-    return [{ key: `c:${number}:${place}`, label, values: { free: perLitre(choice.free_mg_L, manner) } }];
+    return [{ key: `c:${ref}:${place}`, label, values: { free: perLitre(choice.free_mg_L, manner) } }];
   });
   const others = [...(mayBeRed ? (['red'] as const) : []), 'm' as const].map((does) => ({
-    key: `${does}:${number}`,
+    key: `${does}:${ref}`,
     label: LABELS[does],
     values: {},
   }));
@@ -78,13 +78,13 @@ export function choiceButtons(
 
 /** A button for each value of the field that is asked, marked with its letter. */
 export function letterButtons(
-  number: number,
+  ref: string,
   field: AskedField,
   choices: readonly Fields[],
   mark: DecimalMark,
 ): Button[] {
   return choices.map((fields, at) => ({
-    key: `l:${number}:${letterAt(at)}`,
+    key: `l:${ref}:${letterAt(at)}`,
     mark: letterAt(at),
     label: labelOf(field, fields, choices),
     values: { value: choiceText(fields, mark) },
@@ -102,11 +102,16 @@ function choiceText({ additive, tablet_salt_g, tablet_SO2_g }: Fields, mark: Dec
   return additive ?? numberText(tablet_salt_g ?? tablet_SO2_g ?? 0, 2, mark);
 }
 
-/** A button's key taken apart; undefined for one that we never made. */
-export function parseKey(
-  key: string,
-): { readonly does: Does; readonly number: number; readonly which: string } | undefined {
-  const match = /^(w|s|t|m|nf|red|c|l):(\d{1,9})(?::([a-z]|\d))?$/.exec(key);
+/** A button's key taken apart: what it does, to which reading, and which of several it is. */
+export interface Pressed {
+  readonly does: Does;
+  readonly ref: string;
+  readonly which: string;
+}
+
+/** Takes a button's key apart; undefined for one that we never made. */
+export function parseKey(key: string): Pressed | undefined {
+  const match = /^(w|s|t|m|nf|red|c|l):(\d{1,9}\.\d{1,9})(?::([a-z]|\d))?$/.exec(key);
   if (!match) return undefined;
-  return { does: match[1] as Does, number: Number(match[2]), which: match[3] ?? '' };
+  return { does: match[1] as Does, ref: match[2] ?? '', which: match[3] ?? '' };
 }

@@ -13,8 +13,8 @@ export interface Doubt {
 export interface Waiting {
   readonly field: AskedField;
   readonly reading: Reading;
-  /** The number that the reading is remembered under: the buttons of its choices carry it. */
-  readonly number: number;
+  /** What the reading is remembered under: the buttons of its choices carry it. */
+  readonly ref: string;
   readonly askedAt: number;
   /** Choices of that field carry letters: `a` → the fields it stands for. */
   readonly letters: Readonly<Record<string, Fields>>;
@@ -24,18 +24,23 @@ export interface Waiting {
 
 /** A reading that a button of an earlier reply refers to. */
 export interface Remembered {
-  readonly number: number;
+  /** Its name in the cellar: the number of the person, a point, and a number of its own. */
+  readonly ref: string;
+  /** The chat that it was written in: its buttons are for those who are there. */
+  readonly chat: string;
   readonly reading: Reading;
   readonly at: number;
   /** Whether its target was one of the bot's own offers: that counts for the stage it was offered at and no other. */
   readonly chosen?: true;
 }
 
-/** All that is kept of one conversation; plain JSON. */
+/** All that is kept of one person's conversation in one chat; plain JSON. */
 export interface Memory {
   readonly waiting?: Waiting;
-  readonly remembered: readonly Remembered[];
+  /** The number that the next reading gets, after the person's own. */
   readonly nextNumber: number;
+  /** Whether the last reading's target was one of the bot's own offers. */
+  readonly lastWasChosen?: true;
   /** Button keys of the last reply in order, so that `2` on a keyboard presses the second. */
   readonly lastButtons: readonly string[];
   /**
@@ -52,4 +57,4 @@ export interface Memory {
 }
 
 /** What is kept of somebody who never wrote. */
-export const FRESH_MEMORY: Memory = { remembered: [], nextNumber: 1, lastButtons: [], cautionedOn: {} };
+export const FRESH_MEMORY: Memory = { nextNumber: 1, lastButtons: [], cautionedOn: {} };

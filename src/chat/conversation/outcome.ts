@@ -1,8 +1,11 @@
 import type { AdditiveId } from '../../core/additives/additive-id.ts';
 import type { AskedField, Reading } from '../reader/understood.ts';
 import type { Button, Line } from '../replies/reply.ts';
+import type { Write } from '../../core/cellar/cellar-store.ts';
 import type { InDoubt } from './doubt.ts';
+import type { Here } from './here.ts';
 import type { Manner } from './manner.ts';
+import type { Note } from './note.ts';
 import type { Answer } from './ports.ts';
 import type { Settings } from './settings.ts';
 
@@ -11,7 +14,9 @@ export interface Turn {
   readonly settings: Settings;
   readonly manner: Manner;
   /** The number under which the reading is remembered: its buttons carry it. */
-  readonly number: number;
+  readonly ref: string;
+  /** Where and when it was said, and what is known of the vessels. */
+  readonly here: Here;
   /** Additives whose cautions this person has had in full today. */
   readonly cautioned: ReadonlySet<string>;
   /** Where the reading is a line of a round: what its own line says, and whether the additive stands above. */
@@ -31,6 +36,10 @@ export interface Outcome {
   readonly askedTarget?: true;
   /** The additive whose cautions the reply has in full. */
   readonly cautioned?: AdditiveId;
+  /** What the log notes of it. */
+  readonly notes?: readonly Note[];
+  /** What else is kept of it. */
+  readonly keeps?: readonly Write[];
   /** What stands for the whole reply where the reading is one line of a round. */
   readonly inRound: readonly Line[];
 }

@@ -1,13 +1,16 @@
+import type { CellarView, Write } from '../../core/cellar/cellar-store.ts';
 import type { AddedAnswer, DoseAnswer, EffectAnswer, SolutionAnswer } from '../../core/dose/answer.ts';
 import type { Language, Understood } from '../reader/understood.ts';
 import type { Reply } from '../replies/reply.ts';
-import type { Memory } from './memory.ts';
+import type { Settings } from './settings.ts';
 
 /** Whom a conversation is with. A cellar may be several chats and people. */
 export interface Who {
   readonly cellar: string;
   readonly chat: string;
   readonly person: string;
+  /** The name that the platform shows for the person. */
+  readonly name?: string;
 }
 
 /** What was sent: a text, the key of a button, or something that is not read. */
@@ -30,9 +33,6 @@ export interface IncomingMessage extends Who {
   readonly content: Content;
 }
 
-/** What has to be kept before anything is sent. */
-export type Write = { readonly kind: 'memory'; readonly who: Who; readonly memory: Memory };
-
 /** What core answers to one reading. */
 export type Answer = DoseAnswer | EffectAnswer | AddedAnswer | SolutionAnswer;
 
@@ -46,10 +46,5 @@ export interface Handled {
   readonly answers?: readonly (Answer | null)[];
 }
 
-/** Where the state of conversations is kept. Asynchronous, so that a database can stand behind it. */
-export interface StatePort {
-  /** What is remembered of this conversation; a fresh memory when nothing is. */
-  load(who: Who): Promise<Memory>;
-  /** Keeps all of it or none. Resolves only when it is kept. */
-  commit(writes: readonly Write[]): Promise<void>;
-}
+/** The conversation, as the edges have it: it looks at the cellar, and neither writes nor sends. */
+export type Handle = (message: IncomingMessage, view: CellarView, settings: Settings) => Promise<Handled>;

@@ -1,57 +1,66 @@
+import type { CellarView } from '../../core/cellar/cellar-store.ts';
 import { finishReading } from '../reader/finish-reading.ts';
 import type { Reading } from '../reader/understood.ts';
 import type { DecimalMark } from '../replies/number-text.ts';
 import type { Line } from '../replies/reply.ts';
 import { answerSingle } from './answer-single.ts';
-import { parseKey } from './buttons.ts';
+import { parseKey, type Pressed } from './buttons.ts';
 import { checkFields } from './check-fields.ts';
 import { complete } from './complete.ts';
+import { withVessels, type Here } from './here.ts';
+import { readingKey } from './keys.ts';
 import { line } from './lines/line.ts';
 import { questionLine } from './lines/question.ts';
 import { vesselText } from './lines/vessel.ts';
 import type { Memory, Remembered } from './memory.ts';
 import { keeping, waitFor } from './next-memory.ts';
-import type { Handled, IncomingMessage } from './ports.ts';
+import type { Handled } from './ports.ts';
 import { chosen } from './press/chosen.ts';
 import { moreLines, safetyLines, workingOf } from './press/shown-again.ts';
+import { asSaid } from './recall.ts';
 import type { Settings } from './settings.ts';
+import { vesselsIn } from './vessels-named.ts';
 import { choicesFor, letterAt, mayWaitFor, waitsFor } from './waiting.ts';
 import { mannerOf } from './manner.ts';
 
 /** A button that was pressed: it means the same however often, and an old or unknown one gets a kind line. */
-export function handlePress(
-  message: IncomingMessage,
-  key: string,
-  memory: Memory,
-  settings: Settings,
-): Handled {
+export async function handlePress(key: string, here: Here, view: CellarView): Promise<Handled> {
+  const { settings, message } = here;
   const button = parseKey(key);
-  const found = memory.remembered.find(({ number }) => number === button?.number);
-  if (!button || !found) return saying(settings, [line('first', 'old-button')]);
-  const again = (reading: Reading): Handled => answerAgain(message, checkFields(reading), memory, settings);
-  switch (button.does) {
+  const kept = button && (await view.kept(readingKey(button.ref)));
+  const found = kept === undefined ? undefined : (JSON.parse(kept) as Remembered);
+  // A button is for those who see it.
+  if (!button || found?.chat !== message.chat) return saying(settings, [line('first', 'old-button')]);
+  return pressed(button, found, await withVessels(here, view, vesselsIn(found.reading.fields)));
+}
+
+function pressed({ does, which }: Pressed, found: Remembered, here: Here): Handled {
+  const { memory, settings } = here;
+  const again = (reading: Reading, chosenNow = false): Handled =>
+    answerAgain(checkFields(reading), here, chosenNow);
+  switch (does) {
     case 'w':
       return saying(settings, workingOf(found.reading, markOf(memory), settings));
     case 's':
       return saying(settings, safetyLines(found.reading));
     case 'm':
-      return moreOf(message, found, memory, settings);
+      return moreOf(found, here);
     case 'nf':
       return again(complete(statedOf(found), { fields: { stage: 'malolactic' } }, settings));
     case 'red':
       return again(complete(found.reading, { fields: { style: 'red' } }, settings));
     case 't':
-      return askTarget(message, found, memory, settings);
+      return askTarget(found, here);
     case 'c': {
-      const choice = chosen(found.reading, Number(button.which), markOf(memory), settings);
+      const choice = chosen(found.reading, Number(which), markOf(memory), settings);
       if (choice === undefined) return saying(settings, [line('first', 'old-button')]);
       if ('lines' in choice) return saying(settings, choice.lines);
-      return asChosen(again(complete(found.reading, { fields: { target: choice.target } }, settings)));
+      return again(complete(found.reading, { fields: { target: choice.target } }, settings), true);
     }
     case 'l': {
       const field = waitsFor(found.reading);
       const choices = field === undefined ? [] : choicesFor(field, found.reading, settings);
-      const fields = choices.find((_, at) => letterAt(at) === button.which);
+      const fields = choices.find((_, at) => letterAt(at) === which);
       if (fields === undefined) return saying(settings, [line('first', 'old-button')]);
       return again(complete(found.reading, { fields }, settings));
     }
@@ -68,18 +77,6 @@ function withoutTarget(reading: Reading): Reading {
   return { ...reading, fields };
 }
 
-/** Keeps of the reading that was just answered that its target was an offer. */
-function asChosen({ writes, ...rest }: Handled): Handled {
-  return {
-    ...rest,
-    writes: writes.map(({ memory, ...write }) => {
-      const { remembered } = memory;
-      const last = remembered.slice(-1).map((one) => ({ ...one, chosen: true as const }));
-      return { ...write, memory: { ...memory, remembered: [...remembered.slice(0, -1), ...last] } };
-    }),
-  };
-}
-
 function markOf(memory: Memory): DecimalMark {
   return memory.decimalMark ?? '.';
 }
@@ -89,46 +86,35 @@ function saying(settings: Settings, lines: readonly Line[]): Handled {
 }
 
 /** The reply to a reading that a button has changed; it is a new one, with buttons of its own. */
-function answerAgain(
-  message: IncomingMessage,
-  reading: Reading,
-  memory: Memory,
-  settings: Settings,
-): Handled {
+function answerAgain(reading: Reading, here: Here, isOffer: boolean): Handled {
+  const { memory, settings } = here;
   const { writes, replies } = answerSingle(
-    message,
     { readings: [reading], shared: {}, language: settings.language, decimalMark: markOf(memory) },
-    memory,
-    settings,
+    here,
+    { chosen: isOffer },
   );
   return { writes, replies };
 }
 
-function moreOf(message: IncomingMessage, found: Remembered, memory: Memory, settings: Settings): Handled {
+function moreOf(found: Remembered, here: Here): Handled {
+  const { memory, settings } = here;
   const { lines, buttons } = moreLines(found, markOf(memory), settings);
   const next: Memory = { ...memory, lastButtons: buttons.map(({ key }) => key) };
-  return {
-    writes: keeping(message, next),
-    replies: [{ language: settings.language, lines, buttons }],
-  };
+  return { writes: keeping(here, next), replies: [{ language: settings.language, lines, buttons }] };
 }
 
 /** Another target for a reading: it is asked for and waits, without the one before. */
-function askTarget(
-  message: IncomingMessage,
-  { number, reading }: Remembered,
-  memory: Memory,
-  settings: Settings,
-): Handled {
+function askTarget({ ref, reading }: Remembered, here: Here): Handled {
+  const { memory, settings, message } = here;
   const { assumed: _assumed, asks: _asks, ...draft } = withoutTarget(reading);
   const without = finishReading(draft, settings);
   const { waiting: _before, ...others } = memory;
   // At a stage without a usual target nothing may wait: there it is to be written whole.
   const next: Memory = mayWaitFor('target', without)
-    ? { ...others, waiting: waitFor('target', { number, reading: without, at: message.at }, settings) }
+    ? { ...others, waiting: waitFor('target', { ref, reading: asSaid(without), at: message.at }, settings) }
     : { ...others, askedTarget: { at: message.at, reading: without }, lastButtons: [] };
   const manner = mannerOf(without, markOf(memory), settings);
   const question = questionLine('target', without, manner, settings, 'first');
   const ofWhich = line('first', 'target-of', { vessel: vesselText(reading) });
-  return { ...saying(settings, [ofWhich, question]), writes: keeping(message, next) };
+  return { ...saying(settings, [ofWhich, question]), writes: keeping(here, next) };
 }

@@ -1,3 +1,4 @@
+import type { CellarView } from '../../core/cellar/cellar-store.ts';
 import { readMessage } from '../reader/read-message.ts';
 import type { Fields, Reading, Understood } from '../reader/understood.ts';
 import { answerOfNames } from './answer-of-names.ts';
@@ -8,67 +9,64 @@ import { parseKey } from './buttons.ts';
 import { checkFields } from './check-fields.ts';
 import { choiceByWords } from './choice-by-words.ts';
 import { answers, asAnswered, complete, completeWaiting } from './complete.ts';
+import { withVessels, type Here } from './here.ts';
 import { keepManner } from './keep-manner.ts';
 import type { Memory, Waiting } from './memory.ts';
-import type { Handled, IncomingMessage } from './ports.ts';
+import type { Handled } from './ports.ts';
 import { handlePress } from './press.ts';
 import type { Settings } from './settings.ts';
 import { strengthAnswer } from './strength-answer.ts';
+import { vesselsNamed } from './vessels-named.ts';
 import { stillWaiting } from './waiting.ts';
 import { withShared } from './with-shared.ts';
 
 /** A text: a mark of a button, an answer to the question that waits, or a message of its own. */
-export function handleText(
-  message: IncomingMessage,
-  text: string,
-  memory: Memory,
-  settings: Settings,
-): Handled {
+export async function handleText(text: string, here: Here, view: CellarView): Promise<Handled> {
+  const { message, memory, settings } = here;
   const waiting = stillWaiting(memory, message.at);
   const mark = text.trim().toLowerCase();
   const chosen = waiting && (waiting.letters[mark] ?? choiceByWords(mark, waiting));
-  if (chosen) return answerChosen(message, waiting, chosen, memory, settings);
-  if (!waiting) {
-    const pressed = byKeyboard(message, mark, memory, settings);
-    if (pressed) return pressed;
-  }
+  if (chosen) return answerChosen(waiting, chosen, here, view);
+  const key = waiting ? undefined : buttonOfMark(mark, memory);
+  if (key !== undefined) return handlePress(key, here, view);
+  if (!waiting && isNoButton(mark, memory)) return noSuchButton(mark, here);
   const understood = keepManner(read(text, mark, waiting, memory, settings), text, memory);
-  const alone = figureAfterTarget(message, text.trim(), understood, memory, settings);
+  const alone = figureAfterTarget(text.trim(), understood, here);
   if (alone) return alone;
-  if (understood.readings.length !== 1) return answerRound(message, checked(understood), memory, settings);
   const whole = completed(understood, waiting, settings);
-  return answerSingle(message, checked(whole), memory, settings, whole !== understood);
+  const near = await withVessels(here, view, vesselsNamed(whole));
+  if (whole.readings.length !== 1) return answerRound(checked(whole), near);
+  return answerSingle(checked(whole), near, { completes: whole !== understood });
 }
 
-/** A number while no field waits: a button, or one that no button has. */
-function byKeyboard(
-  message: IncomingMessage,
-  mark: string,
-  memory: Memory,
-  settings: Settings,
-): Handled | undefined {
-  if (!/^\d{1,3}$/.test(mark) || memory.lastButtons.length === 0) return undefined;
-  const button = memory.lastButtons[Number(mark) - 1];
-  if (button !== undefined) return handlePress(message, button, memory, settings);
-  return mark.length === 1 || followsChoice(memory) ? noSuchButton(mark, memory, settings) : undefined;
+/** A number while no field waits presses the button that has it. */
+function buttonOfMark(mark: string, { lastButtons }: Memory): string | undefined {
+  return /^\d{1,3}$/.test(mark) ? lastButtons[Number(mark) - 1] : undefined;
+}
+
+/** A number that could be meant for a button, and that none has. */
+function isNoButton(mark: string, memory: Memory): boolean {
+  if (!/^\d{1,3}$/.test(mark) || memory.lastButtons.length === 0) return false;
+  return mark.length === 1 || followsChoice(memory);
 }
 
 /** After a choice a number may repeat one of its figures, which is no reading. */
-function followsChoice({ lastButtons, remembered }: Memory): boolean {
-  return lastButtons.some((key) => parseKey(key)?.does === 'c') || remembered.at(-1)?.chosen === true;
+function followsChoice({ lastButtons, lastWasChosen }: Memory): boolean {
+  return lastButtons.some((key) => parseKey(key)?.does === 'c') || lastWasChosen === true;
 }
 
-function answerChosen(
-  message: IncomingMessage,
+async function answerChosen(
   waiting: Waiting,
   fields: Fields,
-  memory: Memory,
-  settings: Settings,
-): Handled {
+  here: Here,
+  view: CellarView,
+): Promise<Handled> {
+  const { memory, settings } = here;
   const reading = checkFields(complete(waiting.reading, { fields }, settings));
   const decimalMark = memory.decimalMark ?? '.';
   const understood = { readings: [reading], shared: {}, language: settings.language, decimalMark };
-  return answerSingle(message, understood, memory, settings, true);
+  const near = await withVessels(here, view, vesselsNamed(understood));
+  return answerSingle(understood, near, { completes: true });
 }
 
 /** The message as it is read beside the question that waits. */
@@ -113,8 +111,8 @@ function checked(understood: Understood): Understood {
 
 /** The message with its one reading completed by the one that waits, where it completes it. */
 function completed(understood: Understood, waiting: Waiting | undefined, settings: Settings): Understood {
-  const [only] = understood.readings;
-  if (!waiting || !only || only.problems.length > 0) return understood;
+  const [only, another] = understood.readings;
+  if (!waiting || !only || another || only.problems.length > 0) return understood;
   const next: Reading = asAnswered(waiting, withShared(only, understood.shared));
   if (!answers(waiting, next)) return understood;
   return { ...understood, readings: [completeWaiting(waiting, next, settings)], shared: {} };

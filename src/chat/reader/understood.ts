@@ -46,9 +46,13 @@ export type FieldName = keyof Fields;
 /** What the bot filled in; every one of these stands in the reply. */
 export interface Assumed {
   readonly additive?: AdditiveId;
+  /** The strength of the usual additive, where it is not pure. */
+  readonly strength_percent?: number;
   readonly target?: Target;
   readonly stage?: Stage;
   readonly volume_L?: number;
+  /** The share that the cellar adds to doses from a target. */
+  readonly binding_allowance_percent?: number;
   /** Present where a gallon was read without saying which. */
   readonly gallon?: 'US' | 'imperial';
 }
@@ -127,6 +131,10 @@ export interface Marks {
   statedTotal?: true;
   /** One volume beside several vessels: of each or in all? */
   eachOrTotal?: true;
+  /** The message says "if": nothing of it is a fact. */
+  conditional?: true;
+  /** The volume was asked about: what was said, and what the vessel is known to hold, in litres. */
+  volumeChoices?: readonly number[];
 }
 
 /** Where a field stood in the text (UTF-16 offsets of the message as it came). */
@@ -162,6 +170,12 @@ export interface Reading {
   readonly chemical_lot?: string;
   /** A remark for the log, in the person's words. */
   readonly remark?: string;
+  /** Fields that stand for what is known of the vessel and not for what was said, with the time they are of. */
+  readonly recalled?: Readonly<Partial<Record<FieldName, number>>>;
+  /** Fields that the log has had from this person already, when the reading goes on over several messages. */
+  readonly noted?: readonly FieldName[];
+  /** Whether the sample was taken before or after the last addition, where that was asked; `dose` wants one all the same. */
+  readonly sampled?: 'before' | 'after' | 'dose';
   /** What else was read that steers what is asked. */
   readonly marks: Readonly<Marks>;
   readonly where: Readonly<Partial<Record<FieldName, Place>>>;
@@ -181,6 +195,8 @@ export interface ReaderSettings {
   readonly language: Language;
   readonly gallon: 'US' | 'imperial';
   readonly usualAdditive: AdditiveId;
+  /** Its strength, where it is not pure. */
+  readonly usualStrength?: { readonly strength_percent: number; readonly strength_of?: 'salt' };
   readonly temperatureUnit: 'C' | 'F';
   readonly volumeUnit: VolumeUnit;
   /** Usual molecular targets in mg/L. */

@@ -149,6 +149,7 @@ export interface SentenceValues {
   'fact-volume': 'volume';
   'fact-volume-count': 'count' | 'volume';
   fault: never;
+  'fault-unwritten': never;
   'ferment-stop': 'adds';
   'ferment-stop-more': never;
   'figure-alone': 'adds' | 'count' | 'stage' | 'text' | 'unit' | 'wine';
@@ -291,6 +292,7 @@ export interface SentenceValues {
   'third-needs': 'third';
   unreadable: 'what';
   'usual-strength': 'named';
+  'vessel-new': 'vessel';
   'warning-addition-large': 'dose_mg_L' | 'unit';
   'warning-additive-not-permitted': 'additive';
   'warning-already-dosed': never;

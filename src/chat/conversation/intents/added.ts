@@ -31,7 +31,7 @@ export function answerAdded(reading: Reading, turn: Turn): Outcome {
       ...assumedLines(reading, manner),
       ...workingLines(answer.steps, manner),
     ],
-    buttons: answer.steps.length > 0 ? buttonsFor(turn.number, ['w', 's']) : [],
+    buttons: answer.steps.length > 0 ? buttonsFor(turn.ref, ['w', 's']) : [],
   };
 }
 

@@ -17,12 +17,12 @@ export interface Question {
 /** The question for a field of a remembered reading, with the letters of its choices. */
 export function questionFor(
   field: AskedField,
-  { number, reading }: { readonly number: number; readonly reading: Reading },
+  { ref, reading }: { readonly ref: string; readonly reading: Reading },
   room: Line['room'],
   manner: Manner,
   settings: Settings,
 ): Question {
-  const buttons = letterButtons(number, field, choicesFor(field, reading, settings), manner.mark);
+  const buttons = letterButtons(ref, field, choicesFor(field, reading, settings), manner.mark);
   const options = buttons.map(({ mark: letter, label, values }) => ({
     ...line(room, 'option', { mark: letter }),
     list: [{ key: label, values }],
@@ -33,10 +33,10 @@ export function questionFor(
 /** The one question that a reply to this reading asks, and the field that waits for its answer. */
 export function asking(
   reading: Reading,
-  { number, settings, manner }: Turn,
+  { ref, settings, manner }: Turn,
   room: Line['room'],
 ): Question & { readonly waits?: AskedField } {
   const field = waitsFor(reading);
   if (field === undefined) return { question: [], buttons: [] };
-  return { ...questionFor(field, { number, reading }, room, manner, settings), waits: field };
+  return { ...questionFor(field, { ref, reading }, room, manner, settings), waits: field };
 }

@@ -51,7 +51,7 @@ export function answerDose(reading: Reading, turn: Turn): Outcome {
 function wholeDose(reading: Reading, request: DoseRequest, answer: DoseAnswer, turn: Turn): Outcome {
   const additive = additiveOf(reading);
   if (additive === undefined || !hasAmount(answer)) return partialDose(reading, request, answer, turn);
-  const { manner, number } = turn;
+  const { manner, ref } = turn;
   const inFull = !turn.cautioned.has(additive.id);
   const first = firstOfDose(vesselText(reading), answer, additive, manner);
   const condition = conditionLines(reading, answer, manner);
@@ -82,7 +82,7 @@ function wholeDose(reading: Reading, request: DoseRequest, answer: DoseAnswer, t
       ...warningLines(answer.warnings, manner, 'warning', lowIsSaid(reading)),
       ...cautionLines(additive, inFull),
     ],
-    buttons: doseButtons(number, {
+    buttons: doseButtons(ref, {
       stageAssumed: reading.assumed.stage !== undefined,
       mayBeRed: redFigures(answer) !== undefined,
       cautionsShort: !inFull,
@@ -106,7 +106,7 @@ function otherArithmetic(request: DoseRequest): DoseAnswer | undefined {
 }
 
 function choice(reading: Reading, answer: DoseAnswer, turn: Turn): Outcome {
-  const { manner, number } = turn;
+  const { manner, ref } = turn;
   const additive = additiveOf(reading);
   const vessel = vesselText(reading);
   const ph = numberText(reading.fields.ph ?? 0, 2, manner.mark);
@@ -125,13 +125,13 @@ function choice(reading: Reading, answer: DoseAnswer, turn: Turn): Outcome {
       // Under a choice there is no button `Safety`.
       ...(additive === undefined ? [] : cautionLines(additive, true)),
     ],
-    buttons: choiceButtons(number, answer.choices ?? [], redFigures(answer) !== undefined, manner),
+    buttons: choiceButtons(ref, answer.choices ?? [], redFigures(answer) !== undefined, manner),
     ...(additive && { cautioned: additive.id }),
   };
 }
 
 function nothing(reading: Reading, answer: DoseAnswer, turn: Turn): Outcome {
-  const { manner, number } = turn;
+  const { manner, ref } = turn;
   const first = nothingLines(reading, answer, manner);
   return {
     answer,
@@ -145,7 +145,7 @@ function nothing(reading: Reading, answer: DoseAnswer, turn: Turn): Outcome {
       ...assumedLines(reading, manner),
       ...warningLines(answer.warnings, manner, 'warning', ['rounding-coarse']),
     ],
-    buttons: doseButtons(number, {
+    buttons: doseButtons(ref, {
       stageAssumed: reading.assumed.stage !== undefined,
       mayBeRed: false,
       cautionsShort: false,

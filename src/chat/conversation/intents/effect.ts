@@ -57,7 +57,7 @@ export function answerEffect(reading: Reading, turn: Turn): Outcome {
       ]),
       ...cautionLines(additive, inFull),
     ],
-    buttons: buttonsFor(turn.number, [...(inFull ? [] : (['s'] as const)), 'w', 'm']),
+    buttons: buttonsFor(turn.ref, [...(inFull ? [] : (['s'] as const)), 'w', 'm']),
     ...(inFull && { cautioned: additive.id }),
   };
 }

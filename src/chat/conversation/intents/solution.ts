@@ -42,7 +42,7 @@ export function answerSolution(reading: Reading, turn: Turn): Outcome {
       ...workingLines(answer.steps, manner),
       ...cautionLines(request.additive, inFull, 'water'),
     ],
-    buttons: buttonsFor(turn.number, inFull ? ['w'] : ['w', 's']),
+    buttons: buttonsFor(turn.ref, inFull ? ['w'] : ['w', 's']),
   };
 }
 

@@ -5,6 +5,7 @@ import { measureText } from '../../replies/quantity-text.ts';
 import type { Line } from '../../replies/reply.ts';
 import { mannerOf } from '../manner.ts';
 import type { Said } from '../next-memory.ts';
+import type { Note } from '../note.ts';
 import type { Settings } from '../settings.ts';
 import { additiveOf } from '../to-requests.ts';
 import { assumedLines } from './assumed.ts';
@@ -17,6 +18,8 @@ type Part = Omit<Line, 'room'>;
 /** One vessel of a round: its name at the head of its line, and what was said to it. */
 export interface SaidInRound extends Said {
   readonly name: string;
+  /** What the log notes of it. */
+  readonly notes: readonly Note[];
 }
 
 /** What holds for a whole round, said once under its lines: the stage, what was assumed, the cautions. */

@@ -88,13 +88,13 @@ export function moreLines(
   mark: DecimalMark,
   settings: Settings,
 ): { lines: Line[]; buttons: Button[] } {
-  const { reading, number } = found;
+  const { reading, ref } = found;
   const manner = mannerOf(reading, mark, settings);
   const warned = reckonAgain(reading, settings).warnings;
   const warnings = allWarningLines(warned, manner);
   const head = line('first', 'more-head', { vessel: vesselText(reading) });
   return {
     lines: [head, ...(warnings.length > 0 ? warnings : [line('first', 'more-no-warnings')])],
-    buttons: buttonsFor(number, buttonsBehind(reading, warned)),
+    buttons: buttonsFor(ref, buttonsBehind(reading, warned)),
   };
 }

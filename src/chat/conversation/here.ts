@@ -1,0 +1,72 @@
+import type { CellarView, Person } from '../../core/cellar/cellar-store.ts';
+import type { Vessel } from '../../core/cellar/vessel.ts';
+import { claimKey, memoryKey, planKey, SETTINGS_KEY } from './keys.ts';
+import { FRESH_MEMORY, type Memory } from './memory.ts';
+import type { Claim, Plan } from './plan.ts';
+import type { IncomingMessage } from './ports.ts';
+import { mergeSettings, type Settings } from './settings.ts';
+
+/** What is known of the vessels that a message is about. */
+export interface CellarFacts {
+  readonly vessels: ReadonlyMap<string, Vessel>;
+  /** Who is about to dose which vessel. */
+  readonly claims: ReadonlyMap<string, Claim>;
+  /** The dose that was last reckoned for a vessel. */
+  readonly plans: ReadonlyMap<string, Plan>;
+  readonly people: ReadonlyMap<number, Person>;
+}
+
+/** Nothing is known yet. */
+export const NO_FACTS: CellarFacts = {
+  vessels: new Map(),
+  claims: new Map(),
+  plans: new Map(),
+  people: new Map(),
+};
+
+/** Where and when a message came in, and all that is known there. */
+export interface Here extends CellarFacts {
+  readonly message: IncomingMessage;
+  readonly memory: Memory;
+  readonly settings: Settings;
+  /** The number of the person who writes, and whether they are new in this cellar. */
+  readonly me: number;
+  readonly isNewPerson: boolean;
+  /** The number that the next entry of the log gets. */
+  readonly nextEntry: number;
+}
+
+/** What is known of the person and the cellar before the message is read. */
+export async function arrive(message: IncomingMessage, view: CellarView, defaults: Settings): Promise<Here> {
+  const known = await view.person(message.person);
+  const kept = await view.kept(memoryKey(message));
+  const set = await view.kept(SETTINGS_KEY);
+  const people = known === undefined ? await view.people() : [];
+  return {
+    ...NO_FACTS,
+    message,
+    memory: kept === undefined ? FRESH_MEMORY : (JSON.parse(kept) as Memory),
+    settings: { ...mergeSettings(defaults, set), language: message.language },
+    me: known?.number ?? Math.max(0, ...people.map(({ number }) => number)) + 1,
+    isNewPerson: known === undefined || known.name !== message.name,
+    nextEntry: await view.nextEntry(),
+  };
+}
+
+/** The same with what is known of some vessels. */
+export async function withVessels(here: Here, view: CellarView, names: readonly string[]): Promise<Here> {
+  const vessels = new Map<string, Vessel>();
+  const claims = new Map<string, Claim>();
+  const plans = new Map<string, Plan>();
+  for (const name of new Set(names)) {
+    const vessel = await view.vessel(name);
+    if (vessel) vessels.set(name, vessel);
+    const claim = await view.kept(claimKey(name));
+    if (claim !== undefined) claims.set(name, JSON.parse(claim) as Claim);
+    const plan = await view.kept(planKey(name));
+    if (plan !== undefined) plans.set(name, JSON.parse(plan) as Plan);
+  }
+  if (vessels.size + claims.size === 0) return { ...here, vessels, claims, plans };
+  const people = new Map((await view.people()).map((person) => [person.number, person]));
+  return { ...here, vessels, claims, plans, people };
+}

@@ -1,0 +1,29 @@
+import type { Who } from './ports.ts';
+
+/** What the cellar has set. */
+export const SETTINGS_KEY = 'settings';
+
+/** One person's conversation in one chat. */
+export function memoryKey({ chat, person }: Pick<Who, 'chat' | 'person'>): string {
+  return `memory ${JSON.stringify([chat, person])}`;
+}
+
+/** A reading that buttons refer to. */
+export function readingKey(ref: string): string {
+  return `reading ${ref}`;
+}
+
+/** Who is about to dose a vessel. */
+export function claimKey(vessel: string): string {
+  return `claim ${vessel}`;
+}
+
+/** The last dose that was reckoned for a vessel. */
+export function planKey(vessel: string): string {
+  return `plan ${vessel}`;
+}
+
+/** What an event writes into the log begins with this, so that the same event never writes twice. */
+export function eventKey({ chat, id }: { readonly chat: string; readonly id: string }): string {
+  return `${JSON.stringify([chat, id])} `;
+}
