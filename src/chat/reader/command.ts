@@ -6,6 +6,8 @@ export type SaidDay =
   | { readonly is: 'today' }
   | { readonly is: 'yesterday' }
   | { readonly is: 'before-yesterday' }
+  /** So many days ago, 3 or more. */
+  | { readonly is: 'days-ago'; readonly days: number }
   /** The last such day before today; 1 is Monday. */
   | { readonly is: 'weekday'; readonly weekday: number }
   /** Without a year the last such date that is not in the future. */
@@ -45,7 +47,8 @@ export type Setting =
 export type Span =
   | { readonly is: 'month' } // this month
   | { readonly is: 'last-month' }
-  | { readonly is: 'year'; readonly year?: number }
+  | { readonly is: 'year'; readonly year?: number } // without a year this one
+  | { readonly is: 'last-year' }
   | { readonly is: 'between'; readonly from: SaidDay; readonly to: SaidDay }
   | { readonly is: 'all' };
 
@@ -78,7 +81,7 @@ export type Command =
   | { readonly name: 'told' } // T4 red; T4 is 5200 L now; T4 in malo
   | { readonly name: 'capacity' } // T4 holds 6000 L: the litres are in `volume_L`
   | { readonly name: 'racked' }
-  | { readonly name: 'topped' }
+  | { readonly name: 'topped'; readonly from?: string } // `from`: the vessel whose wine it was topped with
   | { readonly name: 'acid' }
   | { readonly name: 'moved'; readonly to: string } // `volume_L` where only a part was moved
   | { readonly name: 'blended'; readonly to: string }

@@ -6,7 +6,7 @@ import type { Category, Product, Stage, Style, Target } from '../../core/wine.ts
 /** The languages of the message language, by their ISO 639-1 codes. */
 export type Language = 'en' | 'es' | 'fr' | 'it' | 'de' | 'pt';
 
-/** What a person wants; `titration` and `command` are named by the message language and not read yet. */
+/** What a person wants; `titration` is named by the message language and not read yet. */
 export type Intent =
   'dose' | 'effect' | 'added' | 'reading' | 'solution' | 'titration' | 'command' | 'emergency' | 'chat';
 
@@ -51,8 +51,6 @@ export interface Assumed {
   readonly target?: Target;
   readonly stage?: Stage;
   readonly volume_L?: number;
-  /** The share that the cellar adds to doses from a target. */
-  readonly binding_allowance_percent?: number;
   /** Present where a gallon was read without saying which. */
   readonly gallon?: 'US' | 'imperial';
 }
@@ -131,6 +129,8 @@ export interface Marks {
   statedTotal?: true;
   /** One volume beside several vessels: of each or in all? */
   eachOrTotal?: true;
+  /** Beside readings, what was done to the vessel: it voids what was known of it. */
+  alsoSaid?: 'racked' | 'moved' | 'topped' | 'blended' | 'acid';
   /** The message says "if": nothing of it is a fact. */
   conditional?: true;
   /** The volume was asked about: what was said, and what the vessel is known to hold, in litres. */
