@@ -51,6 +51,8 @@ export interface Assumed {
   readonly target?: Target;
   readonly stage?: Stage;
   readonly volume_L?: number;
+  /** The share that the cellar adds to doses from a target. */
+  readonly binding_allowance_percent?: number;
   /** Present where a gallon was read without saying which. */
   readonly gallon?: 'US' | 'imperial';
 }

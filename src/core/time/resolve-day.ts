@@ -38,6 +38,8 @@ export function resolveDay(said: SaidDay, here: ZonedMoment): ResolvedDay {
       return before(1);
     case 'before-yesterday':
       return before(2);
+    case 'days-ago':
+      return before(said.days);
     case 'weekday':
       return before((today.weekday - said.weekday + 7) % 7 || 7);
     case 'date':

@@ -32,6 +32,7 @@ test.each<[Omit<SaidWhen, 'text'>, string]>([
   [{ day: { is: 'today' } }, 'day 2026-11-12'],
   [{ day: { is: 'yesterday' } }, 'day 2026-11-11'],
   [{ day: { is: 'before-yesterday' } }, 'day 2026-11-10'],
+  [{ day: { is: 'days-ago', days: 12 } }, 'day 2026-10-31'],
   [{ day: { is: 'yesterday' }, hour: 17 }, 'moment 2026-11-11T17:00:00+01:00'],
   [{ day: { is: 'weekday', weekday: 4 } }, 'day 2026-11-5'],
   [{ day: { is: 'weekday', weekday: 3 } }, 'day 2026-11-11'],
