@@ -35,6 +35,11 @@ const PACKAGES: readonly { readonly name: RegExp; readonly in: RegExp; readonly 
     why: 'a second platform must need no change elsewhere',
   },
   { name: /^@fluent\//, in: /^src\/(chat\/replies|edge)\//, why: 'sentences are made in one room' },
+  {
+    name: /^(csv-(parse|stringify)(\/.*)?|(read|write)-excel-file\/.*|fflate)$/,
+    in: /^src\/edge\/files\//,
+    why: 'bytes of tables are written and read in one room',
+  },
   { name: /^zod$/, in: /^src\/(edge\/|main\.ts|ask\.ts)/, why: 'what comes in is checked at the rim' },
   { name: /^pino$/, in: /^src\/(edge\/|main\.ts|ask\.ts)/, why: 'core and chat say nothing to a log' },
 ];
