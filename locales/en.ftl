@@ -668,3 +668,106 @@ button-choice-to = To { $free }
 
 fault-unwritten = Not noted: I could not write it down. Please send it again in a minute.
 vessel-new = { $vessel } is new to me: kept from now on.
+
+## Files: export and import
+
+export-entry = No.
+export-kind = Kind
+export-done = Done (local time)
+export-noted = Noted (local time)
+export-late = Late
+export-is-late = late
+export-person = Person
+export-unnamed = person { $number }
+export-vessels = Vessel
+export-to = Into
+export-event = What happened
+export-wine-lot = Wine lot
+export-wine = Wine
+export-additive = Additive
+export-strength_percent = Strength %
+export-chemical_lot = Lot of the additive
+export-supplier = Supplier
+export-mass_g = Quantity g
+export-additive_volume_mL = Quantity mL
+export-tablets = Tablets
+export-SO2_g = SO2 added g
+export-added_mg_L = SO2 added mg/L
+export-planned_mg_L = SO2 planned mg/L
+export-planned_free_mg_L = Free SO2 aimed at mg/L
+export-volume_L = Volume L
+export-us-gallons = Volume US gal
+export-ph = pH
+export-free_mg_L = Free SO2 mg/L
+export-total_mg_L = Total SO2 mg/L
+export-temperature_C = Temperature °C
+export-alcohol_percent = Alcohol % vol
+export-sugar_g_L = Sugar g/L
+export-order = Carries out order no.
+export-remark = Remark
+export-corrects = Takes back no.
+export-reason = Reason
+export-struck_by = Struck by no.
+export-struck-reason = Struck because
+export-calculated = Calculated
+export-is-calculated = calculated
+export-is-not-calculated = not calculated
+export-at = Done (with zone)
+export-noted_at = Noted (with zone)
+export-by = Person no.
+export-name = Name
+export-style = Colour
+export-category = Sort
+export-product = Product
+export-organic = Organic
+export-stage = Stage
+export-lot = Lot told
+export-capacity_L = Capacity L
+export-until = Until
+export-strength_of = Strength of
+export-tablet_SO2_g = SO2 in a tablet g
+export-tablet_salt_g = Salt in a tablet g
+export-key = Key
+
+import-vessels = Vessels in the file: { $vessels }.
+import-log = In the file: { $entries } entries, { $vessels } vessels, { $people } people.
+import-not-understood = Not understood and left out: { $count ->
+        [one] line { $lines }
+       *[other] lines { $lines }
+    }.
+import-not-taken = Not taken from it: { $list }.
+import-not-taken-name = { $name ->
+        [ph] pH
+        [free_mg_L] free SO2
+        [total_mg_L] total SO2
+        [temperature_C] temperature
+       *[other] { $name }
+    }
+import-unit = Volumes without a unit are read in { $unit ->
+        [L] litres
+        [hL] hectolitres
+        [mL] millilitres
+        [m3] cubic metres
+        [galUS] US gallons
+       *[galUK] imperial gallons
+    }.
+import-problem = { $code ->
+        [empty] The file is empty.
+        [too-large] The file is too large: at most 512 kB, our own export 8 MB.
+        [too-many-rows] The file has too many rows: at most 20,000.
+        [too-many-columns] The file has too many columns: at most 200.
+        [cell-too-long] A cell of the file is too long to be one.
+        [not-a-table] That is no table that I can read. Send a CSV or XLSX file, or a text with a vessel a line: T4; 5200 L; red
+        [old-spreadsheet] That spreadsheet is of an old kind, or locked by a password. Save it as XLSX or CSV, without a password.
+        [broken] The file is damaged, or a quotation mark in it is never closed. Save it again as XLSX or CSV.
+        [too-heavy] Reading the file takes too long or too much memory. Split it, or send it as CSV.
+        [columns-missing] It looks like my own export, but columns are missing: { $about }.
+        [columns-unknown] It looks like my own export, but I do not know these columns, or they stand there twice: { $about }.
+        [unclear-numbers] I cannot tell whether the numbers have a decimal comma or a decimal point: save the file with one of them, without marks between thousands.
+        [not-understood] It looks like my own export, but these lines are no entries: { $lines }.
+        [doubled] A number or key of these lines stands in the file twice: { $lines }.
+        [refers-outside] These lines are about entries that are not in the file: { $lines }. Export all and import that.
+        [already-noted] These lines are noted here already: { $lines }.
+       *[no-vessels] I found no vessel in it. A line looks like: T4; 5200 L; red
+    }
+import-nothing-taken = Nothing of it was taken.

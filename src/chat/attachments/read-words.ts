@@ -1,0 +1,17 @@
+import { foldText } from '../reader/fold-text.ts';
+import { joinNumbers } from '../reader/join-numbers.ts';
+import { LEXICON } from '../reader/lexicon.ts';
+import { readDraft } from '../reader/read-draft.ts';
+import { setBoard } from '../reader/read-message.ts';
+import { splitTerms } from '../reader/split-terms.ts';
+import type { Draft, ReaderSettings } from '../reader/understood.ts';
+
+/** Longer than any cell or line that names one vessel; own threshold, in UTF-16 units. */
+const LONGEST = 300;
+
+/** What a cell or line of a list says, read as a message is; undefined for what is too long to be one. */
+export function readWords(text: string, settings: ReaderSettings): Draft | undefined {
+  if (text.length > LONGEST) return undefined;
+  const folded = foldText(text);
+  return readDraft(setBoard(text, folded, joinNumbers(splitTerms(folded, LEXICON)), settings));
+}
