@@ -1,0 +1,16 @@
+/**
+ * Signs that a sheet cannot hold as they are, and what looks like their escape: ISO/IEC 29500-1, 22.9.2.19 writes a
+ * sign by its code, `_x000D_`. A carriage return would come back as a line feed, others would be dropped.
+ */
+const UNSAFE = /[\p{Cc}--[\t\n]]|\uFFFD|\p{Noncharacter_Code_Point}|_(?=x[\dA-Fa-f]{4}_)/gv;
+
+/** A text as it stands in the XML of a sheet, before what XML itself escapes. */
+export function escapeXlsx(text: string): string {
+  return text
+    .toWellFormed()
+    .replaceAll(UNSAFE, (sign) =>
+      Array.from({ length: sign.length }, (_, i) => escaped(sign.charCodeAt(i))).join(''),
+    );
+}
+
+const escaped = (code: number): string => `_x${code.toString(16).toUpperCase().padStart(4, '0')}_`;
