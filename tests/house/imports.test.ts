@@ -34,6 +34,7 @@ const PACKAGES: readonly { readonly name: RegExp; readonly in: RegExp; readonly 
     in: /^src\/edge\/telegram\//,
     why: 'a second platform must need no change elsewhere',
   },
+  { name: /^kysely$/, in: /^src\/edge\/store\//, why: 'queries are written in one room' },
   { name: /^@fluent\//, in: /^src\/(chat\/replies|edge)\//, why: 'sentences are made in one room' },
   {
     name: /^(csv-(parse|stringify)(\/.*)?|(read|write)-excel-file\/.*|fflate)$/,

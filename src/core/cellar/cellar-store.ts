@@ -17,7 +17,11 @@ export interface EntryQuery {
   readonly last?: number;
 }
 
-/** Something that is to be said at a moment (milliseconds since 1970). `id` makes it one of its kind. */
+/**
+ * Something that is to be said at a moment (milliseconds since 1970). `id` makes it one of its kind in its cellar:
+ * written again it replaces what is not said yet (whoever has it in hand keeps it), and once it was said nothing comes
+ * back.
+ */
 export interface Due {
   readonly id: string;
   readonly chat: string;
@@ -36,7 +40,7 @@ export interface CellarView {
   /** The entries whose keys begin with these letters, oldest first. */
   entriesOfKeys(begin: string): Promise<readonly LoggedEntry[]>;
   entries(query: EntryQuery): Promise<readonly LoggedEntry[]>;
-  /** The newest entry that a person noted and nobody took back; corrections do not count. */
+  /** The entry that a person noted last and nobody took back; corrections do not count. */
   lastEntryBy(person: number): Promise<LoggedEntry | undefined>;
   vessel(name: string): Promise<Vessel | undefined>;
   /** All vessels, by name. */
@@ -53,7 +57,12 @@ export interface CellarView {
   allDue(): Promise<readonly Due[]>;
 }
 
-/** What a turn writes: all of it is kept or none. */
+/**
+ * What a turn writes: all of it is kept or none. An entry whose key there is already, a correction of what is no entry,
+ * is one itself or is taken back already, and a person whose id has another number are a RangeError: the conversation
+ * has looked before. What is kept `until` a moment (milliseconds since 1970) lapses then. `said` also for what need not
+ * be said any more.
+ */
 export type Write =
   | { readonly kind: 'entry'; readonly entry: NewEntry }
   | { readonly kind: 'keep'; readonly key: string; readonly text: string; readonly until?: number }
@@ -81,14 +90,15 @@ export interface TakenDue extends Due {
  */
 export interface CellarStore {
   /**
-   * Does a turn alone in its cellar. Resolves only when what it wrote (and all that it read) is durable.
+   * Does a turn alone in its cellar. Resolves only when what it wrote (and all that it read) is durable. What `work`
+   * throws it rejects with, and nothing is kept. A turn must not wait for another one of its cellar.
    */
   turn<T>(cellar: string, work: (view: CellarView) => Promise<TurnResult<T>>): Promise<T>;
   /** Reads without writing and without holding anybody up; sees durable things only. */
   look<T>(cellar: string, work: (view: CellarView) => Promise<T>): Promise<T>;
   /** The names of all cellars. */
   cellars(): Promise<readonly string[]>;
-  /** When the next due thing falls due; undefined where there is none. */
+  /** When the next due thing can be handed out: it falls due, or its lease ends; undefined where there is none. */
   nextDue(): Promise<number | undefined>;
   /** Hands out what is due by `now`, each for `lease_ms`: nobody else gets it within that time. */
   takeDue(

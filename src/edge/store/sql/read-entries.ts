@@ -1,0 +1,116 @@
+import type { Kysely } from 'kysely';
+import type { EntryQuery } from '../../../core/cellar/cellar-store.ts';
+import type { LoggedEntry } from '../../../core/cellar/entry.ts';
+import { comparePoints } from '../projection/point.ts';
+import { pastPrefix } from '../past-prefix.ts';
+import { toLoggedEntry } from './entry-rows.ts';
+import type { Tables } from './tables.ts';
+
+const COLUMNS = [
+  'entry.entry',
+  'entry.key',
+  'entry.at',
+  'entry.noted_at',
+  'entry.person',
+  'entry.content',
+] as const;
+const STRUCK = ['struck.entry as struck_entry', 'struck.content as struck_content'] as const;
+
+/** Entries of a cellar, each with the correction that takes it back. */
+const selectLogged = (db: Kysely<Tables>, cellar: string) =>
+  db
+    .selectFrom('entry')
+    .leftJoin('entry as struck', (on) =>
+      on.onRef('struck.cellar', '=', 'entry.cellar').onRef('struck.corrects', '=', 'entry.entry'),
+    )
+    .select([...COLUMNS, ...STRUCK])
+    .where('entry.cellar', '=', cellar);
+
+/** The number that the next entry gets. */
+export async function readNextEntry(db: Kysely<Tables>, cellar: string): Promise<number> {
+  const last = db.selectFrom('entry').select(({ fn }) => fn.max('entry').as('entry'));
+  const row = await last.where('cellar', '=', cellar).executeTakeFirst();
+  return (row?.entry ?? 0) + 1;
+}
+
+/** The entry of that number. */
+export async function readEntry(
+  db: Kysely<Tables>,
+  cellar: string,
+  entry: number,
+): Promise<LoggedEntry | undefined> {
+  const row = await selectLogged(db, cellar).where('entry.entry', '=', entry).executeTakeFirst();
+  return row && toLoggedEntry(row);
+}
+
+/** The entry of that key. */
+export async function readEntryOfKey(
+  db: Kysely<Tables>,
+  cellar: string,
+  key: string,
+): Promise<LoggedEntry | undefined> {
+  const row = await selectLogged(db, cellar).where('entry.key', '=', key).executeTakeFirst();
+  return row && toLoggedEntry(row);
+}
+
+/** The entries whose keys begin so, oldest first. */
+export async function readEntriesOfKeys(
+  db: Kysely<Tables>,
+  cellar: string,
+  begin: string,
+): Promise<readonly LoggedEntry[]> {
+  const past = pastPrefix(begin);
+  const rows = await selectLogged(db, cellar)
+    .where('entry.key', '>=', begin)
+    .$if(past !== undefined, (query) => query.where('entry.key', '<', past ?? ''))
+    .execute();
+  return rows.map(toLoggedEntry).toSorted(comparePoints);
+}
+
+/** The newest entry of a person that nobody took back and that takes back none. */
+export async function readLastEntryBy(
+  db: Kysely<Tables>,
+  cellar: string,
+  person: number,
+): Promise<LoggedEntry | undefined> {
+  const row = await selectLogged(db, cellar)
+    .where('entry.person', '=', person)
+    .where('entry.kind', '<>', 'correction')
+    .where('struck.entry', 'is', null)
+    .orderBy('entry.entry', 'desc')
+    .limit(1)
+    .executeTakeFirst();
+  return row && toLoggedEntry(row);
+}
+
+/** The entries that were asked for, oldest first. Where only the last are wanted they are read from the end. */
+export async function readEntries(
+  db: Kysely<Tables>,
+  cellar: string,
+  { vessel, from, to, last }: EntryQuery,
+): Promise<readonly LoggedEntry[]> {
+  if (last !== undefined && last <= 0) return [];
+  const found =
+    vessel === undefined
+      ? db.selectFrom('entry as place').where('place.cellar', '=', cellar)
+      : db
+          .selectFrom('touched as place')
+          .where('place.cellar', '=', cellar)
+          .where('place.vessel', '=', vessel);
+  const places = found
+    .select(['place.entry', 'place.at'])
+    .$if(from !== undefined, (query) => query.where('place.at', '>=', from ?? 0))
+    .$if(to !== undefined, (query) => query.where('place.at', '<', to ?? 0))
+    .orderBy('place.at', 'desc')
+    .orderBy('place.entry', 'desc')
+    .$if(last !== undefined, (query) => query.limit(last ?? 0));
+  const rows = await db
+    .selectFrom(places.as('found'))
+    .innerJoin('entry', (on) => on.onRef('entry.entry', '=', 'found.entry').on('entry.cellar', '=', cellar))
+    .leftJoin('entry as struck', (on) =>
+      on.onRef('struck.cellar', '=', 'entry.cellar').onRef('struck.corrects', '=', 'entry.entry'),
+    )
+    .select([...COLUMNS, ...STRUCK])
+    .execute();
+  return rows.map(toLoggedEntry).toSorted(comparePoints);
+}

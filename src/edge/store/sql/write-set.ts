@@ -1,0 +1,47 @@
+import type { Kysely } from 'kysely';
+import type { Write } from '../../../core/cellar/cellar-store.ts';
+import { noteEntries } from '../projection/note-entries.ts';
+import { keepDue, markSaid } from './due-things.ts';
+import { dropText, keepText } from './kept-texts.ts';
+import { keepPerson } from './people.ts';
+import { createSqlLedger } from './sql-ledger.ts';
+import type { Tables } from './tables.ts';
+
+/** Writes what a turn writes; whoever calls it sees to it that all of it is kept or none. `now`: ms since 1970. */
+export async function writeSet(
+  db: Kysely<Tables>,
+  writes: readonly Write[],
+  { cellar, now }: { readonly cellar: string; readonly now: number },
+): Promise<void> {
+  await db
+    .insertInto('cellar')
+    .values({ cellar })
+    .onConflict((on) => on.doNothing())
+    .execute();
+  const entries = writes.flatMap((write) => (write.kind === 'entry' ? [write.entry] : []));
+  await noteEntries(createSqlLedger(db, cellar), entries);
+  for (const write of writes) {
+    switch (write.kind) {
+      case 'entry':
+        break;
+      case 'keep':
+        await keepText(db, cellar, { ...write, now });
+        break;
+      case 'drop':
+        await dropText(db, cellar, write.key);
+        break;
+      case 'person':
+        await keepPerson(db, cellar, write);
+        break;
+      case 'forget-person':
+        await keepPerson(db, cellar, { number: write.number, id: null });
+        break;
+      case 'due':
+        await keepDue(db, cellar, write.due);
+        break;
+      case 'said':
+        await markSaid(db, cellar, write.id);
+        break;
+    }
+  }
+}

@@ -1,0 +1,88 @@
+import { mkdirSync, realpathSync } from 'node:fs';
+import { basename, dirname, join } from 'node:path';
+import { DatabaseSync } from 'node:sqlite';
+import type { CellarStore } from '../../../core/cellar/cellar-store.ts';
+import { OperatorError } from '../../operator-error.ts';
+import { asOperatorError, damagedSentence } from './as-operator-error.ts';
+import { checkAside } from './check-aside.ts';
+import { checkNotOrphaned, fileSize, findDamage } from './check-file.ts';
+import { createSqliteStore } from './create-sqlite-store.ts';
+import { migrate, readVersion } from './migrate.ts';
+import { callSqlite } from './sqlite-fault.ts';
+import { lockForWriting } from './writer-lock.ts';
+
+/** What a store is told when it is opened. */
+export interface SqliteStoreOptions {
+  /** The time in milliseconds since 1970: what is kept lapses by it. */
+  readonly now: () => number;
+  /** Told of damage that a check after the start has found: nothing is written from then on. */
+  readonly report: (damage: OperatorError) => void;
+}
+
+/** A larger file is checked after the start: see `checkAside`. */
+const CHECKED_AT_START_bytes = 64_000_000;
+/** How long a statement waits for another program that holds the file: everybody waits with it. */
+const PATIENCE_ms = 100;
+/** What remains of the log of writes after it has once grown. */
+const WAL_KEPT_bytes = 64_000_000;
+
+/**
+ * Opens a cellar file for writing, or makes it, with its folder.
+ *
+ * @throws OperatorError with a sentence where it is damaged, newer, another program's, in use, or cannot be written
+ */
+export async function openSqliteStore(path: string, options: SqliteStoreOptions): Promise<CellarStore> {
+  const toClose: (() => void)[] = [];
+  const close = (): void =>
+    toClose
+      .splice(0)
+      .reverse()
+      .forEach((one) => one());
+  try {
+    const file = realPath(path);
+    toClose.push(lockForWriting(file));
+    checkNotOrphaned(file);
+    const writer = callSqlite(() => new DatabaseSync(file, { timeout: PATIENCE_ms }));
+    toClose.push(() => writer.close());
+    const version = readVersion(writer, file);
+    const isLarge = fileSize(file) > CHECKED_AT_START_bytes;
+    const damage = isLarge ? undefined : findDamage(writer);
+    if (damage !== undefined) throw new OperatorError(damagedSentence(file, damage));
+    configure(writer);
+    migrate(writer, version);
+    const reader = callSqlite(() => new DatabaseSync(file, { readOnly: true, timeout: PATIENCE_ms }));
+    toClose.push(() => reader.close());
+
+    const store = createSqliteStore({ path: file, writer, reader, now: options.now, close });
+    if (isLarge)
+      toClose.push(
+        checkAside(file, (found) => {
+          store.stopWriting(found);
+          options.report(new OperatorError(damagedSentence(file, found)));
+        }),
+      );
+    return store;
+  } catch (error) {
+    close();
+    throw asOperatorError(error, path);
+  }
+}
+
+/** The place of the file itself, so that whoever comes by a link finds the same lock. */
+function realPath(path: string): string {
+  mkdirSync(dirname(path), { recursive: true });
+  try {
+    return realpathSync(path);
+  } catch (error) {
+    if ((error as NodeJS.ErrnoException).code !== 'ENOENT') throw error;
+    return join(realpathSync(dirname(path)), basename(path));
+  }
+}
+
+function configure(writer: DatabaseSync): void {
+  callSqlite(() =>
+    writer.exec(
+      `pragma journal_mode = wal; pragma synchronous = full; pragma secure_delete = fast; pragma journal_size_limit = ${WAL_KEPT_bytes}`,
+    ),
+  );
+}

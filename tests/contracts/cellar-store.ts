@@ -1,0 +1,36 @@
+import { describe } from 'vitest';
+import { testDue } from './cellar-store/due.ts';
+import { testEntryQueries } from './cellar-store/entry-queries.ts';
+import { testKeeping } from './cellar-store/keeping.ts';
+import { testLog } from './cellar-store/log.ts';
+import type { CreateStore } from './cellar-store/notes.ts';
+import { testPeople } from './cellar-store/people.ts';
+import { testProjection } from './cellar-store/projection.ts';
+import { testTurns } from './cellar-store/turns.ts';
+
+/** What every store of cellars has to do; each implementation runs it. */
+export function testCellarStore(name: string, create: CreateStore): void {
+  describe(`${name} as a store of cellars`, () => {
+    describe('keeps a log', () => {
+      testLog(create);
+    });
+    describe('finds entries', () => {
+      testEntryQueries(create);
+    });
+    describe('does turns', () => {
+      testTurns(create);
+    });
+    describe('keeps texts', () => {
+      testKeeping(create);
+    });
+    describe('knows people', () => {
+      testPeople(create);
+    });
+    describe('hands out due things', () => {
+      testDue(create);
+    });
+    describe('derives vessels from the log', () => {
+      testProjection(create);
+    });
+  });
+}

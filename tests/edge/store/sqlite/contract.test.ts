@@ -1,0 +1,15 @@
+import { join } from 'node:path';
+import { openSqliteStore } from '../../../../src/edge/store/sqlite/open-sqlite-store.ts';
+import { testCellarStore } from '../../../contracts/cellar-store.ts';
+import { temporaryFolder } from './temporary-folder.ts';
+
+let files = 0;
+
+testCellarStore('a file of SQLite', async (now) => {
+  files += 1;
+  const path = join(temporaryFolder(), `cellar-${files}.db`);
+  const report = (damage: Error): never => {
+    throw damage;
+  };
+  return openSqliteStore(path, { now, report });
+});
