@@ -210,17 +210,8 @@ ferment-stop =
        *[other] { $adds } does not reliably stop yeast, bottles can burst: ask someone qualified.
     }
 ferment-stop-more = I give no dose for that. Until then: keep it cold, no tight closures.
-added =
-    { $added ->
-        [none] { at }{ $list } went in.
-       *[other] { at }{ $list } went in: { $added } SO2.
-    }
-added-worked = { at }{ $added } SO2 went in: that is { $list }.
-added-bare = { at }{ $added } SO2 went in.
-not-kept-addition = Not kept yet: I keep no log so far, so write it in yours.
 measure-tomorrow = Measure free SO2 tomorrow, before adding again.
 reading-read = { at }{ $list }.
-not-kept-reading = Not kept yet: I keep no readings so far, so write it in your book.
 solution-weigh = Weigh { $amount } { additive } and fill up with water to { $volume }.
 solution-measure = Measure { $amount } { additive } and fill up with water to { $volume }.
 solution-no-recipe = For a solution to store or to clean with I have no recipe yet. A stock I can do: make 5 L of 10% kmbs
@@ -668,6 +659,341 @@ button-choice-to = To { $free }
 
 fault-unwritten = Not noted: I could not write it down. Please send it again in a minute.
 vessel-new = { $vessel } is new to me: kept from now on.
+vessel-unknown =
+    { $vessel ->
+        [none] Which vessel? Like: T4?
+       *[other] I know nothing of { $vessel } yet. Send a reading, like: { $vessel } 1450 gal pH 3.58 free 21
+    }
+recalled = { $list } ({ $day })
+recalled-additive = { additive } ({ $day })
+recalled-allowance = allowance { $percent } % (your setting)
+choice-volume_L = { $value }
+ask-volume-which =
+    { $vessel }: { $known ->
+        [none] { $said } is more than it holds. Is that right?
+       *[other] you wrote { $said }, I had { $known }. Which is it?
+    }
+reading-kept = { at }{ $list }: kept, { $when }.
+button-added = I added it
+button-mine = I do this one
+button-order = Order it
+button-note = Note it
+button-sampled-before = Before
+button-sampled-after = After
+button-dose-anyway = A dose all the same
+button-white = White
+button-undo = Undo { $entry }
+button-done = { $entry } is done
+button-remind = Remind me in 24 h
+added-confirm = { at }{ $added } is { $list }. Note it?
+added-confirm-bare = { at }{ $added } SO2. Note it?
+noted-addition =
+    Noted { $entry }: { $vessel } { $list }, { $when }{ $added ->
+        [none] .
+       *[other] { " " }({ $added } SO2).
+    }{ $order ->
+        [none] { "" }
+       *[other] { " " }Order { $order } is done.
+    }
+noted-bare = Noted { $entry }: { $vessel } { $added } SO2, { $when }.
+noted-measure = Measure free SO2 from { $when }, before adding again.
+noted-measure-now = Measure free SO2 before adding again.
+noted-other = Noted { $entry }, not calculated: { $vessel } { $text }, { $when }.
+already-noted = Already noted as { $entry } at { $when } ({ $who ->
+        [you] you
+       *[other] { $who }
+    }): { $vessel }.
+odd-more-than-planned = That is { $factor } times what I worked out for { $vessel }. A slip? Then undo.
+odd-large = { $added } in one addition is a lot. A slip? Then undo.
+odd-second = { $vessel } already had one, { $when } (entry { $entry }).
+odd-empty = { $vessel } is down as empty since { $when }.
+odd-from-empty = { $vessel } was down as empty since { $when }.
+odd-over-capacity = { $volume } is more than the { $capacity } that { $vessel } holds.
+when-noon = No hour told: noted for noon.
+when-future = { $vessel }: “{ $text }” is still to come ({ $when }). Not noted. When was it?
+when-no-such-day = { $vessel }: there is no such day as “{ $text }”. Not noted. When was it?
+ask-zone = I tell times in UTC. Which zone are you in? Write: time zone Europe/Madrid
+dosed-who =
+    { $who ->
+        [you] You
+       *[other] { $who }
+    }
+dosed-which-first =
+    { $vessel }: { dosed-who } added { $known ->
+        [none] some
+       *[some] { $list }
+    } at { $when }. Sampled before that? No dose until I know.
+dosed-add-more =
+    { $vessel }: { dosed-who } added { $known ->
+        [none] some
+       *[some] { $list }
+    } at { $when }. More all the same?
+dosed-sampled-before =
+    { $vessel }: no dose. { dosed-who } added { $known ->
+        [none] some
+       *[some] { $list }
+    } at { $when }, after that sample. Measure again from { $next }.
+dosed-landed =
+    { $vessel }: no more for now. { dosed-who } added { $known ->
+        [none] some
+       *[some] { $list }
+    } at { $when }, and SO2 goes on binding for a day. Measure again from { $next }.
+dosed-in-round =
+    { $vessel }: no dose. { dosed-who } added { $known ->
+        [none] some
+       *[some] { $list }
+    } at { $when }. Send it alone.
+landed =
+    { $vessel } landed at { $after }{ $planned ->
+        [none] { "" }
+       *[other] , planned { $planned }
+    }: of { $added } { $unit }, { $percent } % bound.
+landed-fell = { $vessel } went from { $before } to { $after } although { $added } { $unit } went in: all bound, or a slip. Measure again.
+landed-too-high = { $vessel } rose by { $rise } although only { $added } { $unit } went in. One figure is off: measure again.
+on-it = { $vessel }: { $who } is on it since { $when }.
+claimed = { $vessel } is yours until { $until }. Others see it.
+claim-taken = { $vessel }: { $who } is on it since { $when }.
+ordered = Order { $entry }: { $vessel } { $list }.
+ordered-open = Open until somebody notes what went in.
+order-how = Like: order T4 256 g
+order-gone = Order { $entry } is not open any more.
+remind-set = I ask about { $vessel } at { $when }.
+remind-late = Too late for that: measure { $vessel } now.
+undo-nothing = There is nothing of yours to undo.
+undo-late = Entry { $entry } is older than 15 minutes. Write: strike { $entry } and why
+undo-not-yours = Entry { $entry } is by { $who }. Write: strike { $entry } and why
+strike-none = There is no entry { $entry }.
+strike-again = Entry { $entry } was struck before, by { $by }.
+strike-correction = Entry { $entry } is itself a correction. Note anew what was right.
+strike-why = Why? Write: strike { $entry } typo
+struck = Struck { $entry } ({ $list }). Both stay in the sheet.
+struck-addition = If it did go in, note it again.
+noted-vessel =
+    Noted { $entry }: { $list }.{ $voids ->
+        [ph] { " " }The pH has to be measured again.
+        [volume] { " " }Tell the new volume with the next reading.
+        [blend] { " " }pH and SO2 have to be measured again.
+       *[none] { "" }
+    }
+amount-unknown = some SO2
+fact-capacity = holds { $volume }
+fact-lot = { $lot }
+event-said =
+    { $event ->
+        [racked] racked
+        [topped] topped
+        [acid] acid added
+        [moved] { $whole ->
+            [part] moved in part to { $to }
+           *[all] moved to { $to }
+        }
+        [blended] { $whole ->
+            [part] blended in part into { $to }
+           *[all] blended into { $to }
+        }
+        [emptied] empty
+        [lot] is { $lot }
+        [later] check later
+        [unwatched] no more checks
+        [watched] checks again
+        [forgotten] forgotten
+       *[told] is
+    }
+entry-addition =
+    { $vessel } { $known ->
+        [none] SO2
+       *[some] { $list }
+    }{ $added ->
+        [none] { "" }
+       *[other] , { $added } mg/L
+    }
+entry-order =
+    order { $vessel } { $known ->
+        [none] { $added } mg/L
+       *[some] { $list }
+    }
+entry-reading = { $vessel } { $list }
+entry-vessel = { $vessel } { event-said } { $list }
+entry-other = { $vessel } { $text } (not calculated)
+entry-stock = { $text }
+entry-correction =
+    strikes { $entry }: { $reason ->
+        [undo] taken back
+        [sampled-before] sampled before the addition
+       *[other] { $reason }
+    }
+sheet-entry =
+    { $entry } · { $when } · { $list } · { $who }{ $late ->
+        [late] { " " }(noted { $noted })
+       *[none] { "" }
+    }{ $struck ->
+        [none] { "" }
+       *[other] { " " }— STRUCK by { $struck }
+    }
+day-head = { $day } ({ $zone }):
+day-empty = Nothing noted on { $day }.
+day-more = Earlier ones of that day are in the export.
+day-none-such = There is no such day.
+history-head = { $vessel }, the newest last:
+history-empty =
+    { $vessel ->
+        [none] Which vessel? Like: T4 history
+       *[other] Nothing noted of { $vessel } yet.
+    }
+history-more = Older ones: export { $vessel }
+list-more = … and { $count } more.
+vessels-none = I know no vessel yet. Send a reading, like: T4 1450 gal pH 3.58 free 21
+vessels-head = { $count } vessels, { $due } to measure now:
+vessels-line =
+    { $vessel }{ $lot ->
+        [none] { "" }
+       *[other] { " " }{ $lot }
+    }: { $free ->
+        [none] no reading
+       *[other] free { $free } ({ $day })
+    }{ $next ->
+        [empty] , empty
+        [now] , MEASURE NOW
+        [later] , next { $check }
+       *[none] { "" }
+    }
+vessel-head = { $vessel }: { $list }
+vessel-bare = { $vessel }
+vessel-empty = { $vessel }: empty since { $day }
+vessel-readings = Last: { $list }
+vessel-void =
+    { $field ->
+        [ph] pH
+       *[other] Volume
+    } not known since { $day }: { $event ->
+        [malolactic] malolactic
+        [blended] blended
+        [acid] acid added
+        [racked] racked
+        [topped] topped
+       *[moved] moved
+    }.
+vessel-addition =
+    { $entry } · { $when } · { $list }{ $added ->
+        [none] { "" }
+       *[other] , { $added } mg/L
+    } · { $who }{ $landed ->
+        [not-yet] { " " }(not measured since)
+       *[landed] { "" }
+    }
+vessel-bound =
+    { $count ->
+        [1] Bound: { $share } % of one addition.
+       *[other] Bound: { $share } % on average of { $count } additions ({ $least }–{ $most } %).
+    }
+vessel-order = Open order { $entry }: { $list } ({ $who }, { $when }).
+vessel-check =
+    Next check { $when }{ $why ->
+        [landing] { " " }(after the addition)
+       *[other] { "" }
+    }.
+vessel-check-due =
+    Check due since { $when }{ $why ->
+        [landing] { " " }(after the addition)
+       *[other] { "" }
+    }.
+vessel-unwatched = No checks. Again: watch it
+due-none = Nothing is due.
+due-head =
+    { $count ->
+        [1] One vessel to measure:
+       *[other] { $count } vessels to measure, the most urgent first:
+    }
+due-stage =
+    { $stage ->
+        [none] { "" }
+       *[other] { " " }(not over yet: no dose)
+    }
+due-overdue =
+    { $days ->
+        [0] { "" }
+       *[other] , { $days } d overdue
+    }
+due-landing = { $vessel }: addition of { $added }, not measured since{ due-overdue }{ due-stage }
+due-usual =
+    { $vessel }: { $free ->
+        [none] never measured
+       *[other] free { $free } on { $day }
+    }{ due-overdue }{ due-stage }
+due-often =
+    { $vessel }: { $free ->
+        [none] never measured
+       *[other] free { $free } on { $day }
+    }{ $low ->
+        [low] , low
+       *[none] { "" }
+    }{ due-overdue }{ due-stage }
+daily-head = Good morning.
+remind = A day ago: { $list }. Measure free SO2 now.
+open-none = No open orders.
+open-head =
+    { $count ->
+        [1] One open order:
+       *[other] { $count } open orders:
+    }
+open-line = { $entry } · { $vessel } { $list } · { $who }, { $when }
+settings-head = Settings of this cellar, and how to change them:
+setting-set = Set. { $list }
+setting-units =
+    Units: { $units ->
+        [us] US gallons
+        [imperial] imperial gallons
+       *[metric] litres
+    } (we work in gallons)
+setting-usual-additive =
+    Usual: { additive }{ $strength ->
+        [none] { "" }
+       *[other] { " " }{ $strength } %
+    } (our usual is kmbs 57%)
+setting-target = Targets, molecular: red { $red }, white { $white }, sweet { $sweet } (target 0.6 for reds)
+setting-allowance =
+    { $percent ->
+        [none] No allowance for binding (allowance 30%)
+       *[other] Allowance for binding: { $percent } % on doses from a target (no allowance)
+    }
+setting-basis =
+    Basis: { $basis ->
+        [oiv] OIV
+       *[other] pK 1.81
+    } (basis OIV, basis 1.81)
+setting-zone =
+    Time zone: { $zone ->
+        [none] not told, so UTC
+       *[other] { $zone }
+    } (time zone Europe/Madrid)
+setting-daily =
+    Daily list: { $daily ->
+        [off] off (daily list at 7:30)
+       *[other] { $daily } (no daily list)
+    }
+setting-quiet = Quiet: { $from } to { $to } (quiet 20 to 6)
+setting-ph-days = A pH counts { $days } days (pH counts 14 days)
+setting-check-days = Checks every { $usual } days; barrels and low ones every { $often } (check every 30 days, check barrels every 14 days)
+setting-short-replies =
+    Replies: { $short ->
+        [short] short (long replies)
+       *[long] whole (short replies)
+    }
+setting-wrong =
+    That cannot be: “{ $text }”. { $of ->
+        [units] Like: we work in gallons
+        [usual-additive] Like: our usual is kmbs 57%
+        [target] Like: target 0.6 for reds
+        [quiet] Like: quiet 20 to 6
+        [daily] Like: daily list at 7:30
+        [zone] Like: time zone Europe/Madrid
+        [allowance] Like: allowance 30%
+        [basis] Like: basis OIV
+        [ph-days] Like: pH counts 14 days
+        [check-days] Like: check every 30 days
+       *[other] Like: short replies
+    }
+forgotten-person = Your name is off further sheets. What you noted stays, as person { $number }.
 
 ## Files: export and import
 

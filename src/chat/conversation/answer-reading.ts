@@ -1,7 +1,9 @@
 import type { Language, Reading } from '../reader/understood.ts';
 import { answerAdded } from './intents/added.ts';
 import { answerChat } from './intents/chat.ts';
-import { answerDose } from './intents/dose.ts';
+import { answerOrder } from './intents/command/order.ts';
+import { answerStatement } from './intents/command/statement.ts';
+import { answerDoseOfVessel } from './intents/dose-of-vessel.ts';
 import { answerEffect } from './intents/effect.ts';
 import { answerEmergency } from './intents/emergency.ts';
 import { answerProblem } from './intents/problem.ts';
@@ -21,6 +23,11 @@ export function answerReading(reading: Reading, language: Language, turn: Turn):
   return { answer: null, inRound: lines.slice(0, 1), lines, buttons: [] };
 }
 
+/** An order; every other command stands alone in its message. */
+function answerOrdered(reading: Reading, turn: Turn): Outcome {
+  return reading.command?.name === 'order' ? answerOrder(reading, turn) : answerChat(reading);
+}
+
 /** Lines about what was read or assumed alone tell nobody anything. */
 function saysSomething({ lines, inRound }: Outcome): boolean {
   return (
@@ -34,7 +41,7 @@ function answerByIntent(reading: Reading, language: Language, turn: Turn): Outco
   if (reading.problems.length > 0) return answerProblem(reading, turn);
   switch (reading.intent) {
     case 'dose':
-      return answerDose(reading, turn);
+      return answerDoseOfVessel(reading, turn);
     case 'effect':
       return answerEffect(reading, turn);
     case 'added':
@@ -43,8 +50,9 @@ function answerByIntent(reading: Reading, language: Language, turn: Turn): Outco
       return answerKeptReading(reading, turn);
     case 'solution':
       return answerSolution(reading, turn);
-    case 'chat':
     case 'command':
+      return answerStatement(reading, turn) ?? answerOrdered(reading, turn);
+    case 'chat':
     case 'titration':
       return answerChat(reading);
   }

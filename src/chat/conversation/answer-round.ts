@@ -32,7 +32,7 @@ export function answerRound(understood: Understood, here: Here): Handled {
   let nextEntry = here.nextEntry;
   const said: SaidInRound[] = readings.map((reading, place) => {
     const own = understood.readings[place] ?? reading;
-    const manner = mannerOf(reading, decimalMark, settings);
+    const manner = mannerOf(reading, decimalMark, here);
     const name = roundName(text, own);
     const round = { own: withoutVolumeIn(own, name), isOneAdditive: additive !== undefined };
     const ref = refAt(here, place);
@@ -40,12 +40,12 @@ export function answerRound(understood: Understood, here: Here): Handled {
     const outcome = answerReading(named(reading, name), understood.language, turn);
     const notes = [...notesOfReading(reading, here), ...(outcome.notes ?? [])];
     nextEntry += notes.length;
-    return { reading: asNoted(reading), outcome, ref, notes, name: name ?? vesselText(reading) };
+    return { reading: asNoted(reading, here), outcome, ref, notes, name: name ?? vesselText(reading) };
   });
   const buttons = safetyButton(said, cautioned);
   const [first] = said;
-  const head = first ? roundHead(additive, shared, mannerOf(first.reading, decimalMark, settings)) : [];
-  const foot = roundFoot(said, cautioned, decimalMark, settings);
+  const head = first ? roundHead(additive, shared, mannerOf(first.reading, decimalMark, here)) : [];
+  const foot = roundFoot(said, cautioned, decimalMark, here);
   const replies = chunks(said, VESSELS_A_MESSAGE).map((chunk, at): Reply => {
     const lines: Line[] = [...head, ...chunk.flatMap(({ outcome }) => warningsLast(outcome.inRound))];
     return {

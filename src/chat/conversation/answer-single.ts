@@ -37,12 +37,12 @@ export function answerSingle(
   const [first] = understood.readings;
   if (!first) return { writes: [], replies: [], understood, answers: [] };
   const reading = prepare(withShared(first, understood.shared), here);
-  const manner = mannerOf(reading, understood.decimalMark, settings);
+  const manner = mannerOf(reading, understood.decimalMark, here);
   const ref = refAt(here);
   const cautioned = cautionedToday(memory, message.at);
   const outcome = answerReading(reading, understood.language, { settings, manner, ref, cautioned, here });
   const notes = [...notesOfReading(reading, here), ...(outcome.notes ?? [])];
-  const logged = asNoted(reading);
+  const logged = asNoted(reading, here);
   const before = stillWaiting(memory, message.at);
   const kept = completes && outcome.doubt ? undefined : keepsWaiting(reading, before);
   const asked = kept ? askAgain(kept, reading, outcome, manner, settings) : outcome;

@@ -63,7 +63,7 @@ export function figureAfterTarget(text: string, understood: Understood, here: He
   const decimalMark = memory.decimalMark ?? '.';
   const unit = only?.concentrationUnit ?? askedTarget.reading.concentrationUnit;
   const asked: Reading = { ...askedTarget.reading, ...(unit && { concentrationUnit: unit }) };
-  const manner = mannerOf(asked, decimalMark, settings);
+  const manner = mannerOf(asked, decimalMark, here);
   const adds = isBare ? text.replace(/^[+-]/, '') : String(figure);
   const lines = [
     line('first', 'figure-alone', { text, ...wholeExample(askedTarget.reading, manner, settings, adds) }),

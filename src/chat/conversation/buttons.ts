@@ -1,27 +1,47 @@
 import { ADDITIVES } from '../../core/additives/additives.ts';
 import type { DoseChoice } from '../../core/dose/answer.ts';
 import type { AskedField, Fields } from '../reader/understood.ts';
-import { numberText, type DecimalMark } from '../replies/number-text.ts';
+import { numberText } from '../replies/number-text.ts';
+import { volumeText } from '../replies/volume-text.ts';
 import type { Button } from '../replies/reply.ts';
 import type { SentenceKey } from '../replies/sentence-keys.ts';
 import { perLitre, type Manner } from './manner.ts';
 import { letterAt } from './waiting.ts';
 
-/** What a button does; its key is `does:ref`, of a choice `does:ref:which`. */
-export type Does = 'w' | 's' | 't' | 'm' | 'nf' | 'red' | 'c' | 'l';
+/** What a button does to a reading; its key is `does:ref`, of a choice `does:ref:which`. */
+export type Does =
+  | 'w' | 's' | 't' | 'm' | 'nf' | 'red' | 'white' | 'c' | 'l'
+  | 'a' | 'y' | 'o' | 'n' | 'gb' | 'ga' | 'gd'; // prettier-ignore
 
-/** At most so many buttons stand under a dose. */
-export const MOST_BUTTONS = 4;
+/** What a button does to an entry of the log; its key is `does:entry`. */
+export type DoesToEntry = 'u' | 'd' | 'r';
+
+/** At most so many buttons stand under a dose for a vessel, and under one for none, which cannot be noted. */
+const MOST_BUTTONS = { vessel: 6, none: 4 } as const;
 
 /** What stands on a button, by what it does. */
 export const LABELS = {
+  a: 'button-added',
+  y: 'button-mine',
+  o: 'button-order',
+  n: 'button-note',
+  gb: 'button-sampled-before',
+  ga: 'button-sampled-after',
+  gd: 'button-dose-anyway',
   nf: 'button-not-finished',
   red: 'button-red',
+  white: 'button-white',
   w: 'button-working',
   s: 'button-safety',
   t: 'button-target',
   m: 'button-more',
 } as const satisfies Partial<Record<Does, SentenceKey>>;
+
+const ENTRY_LABELS = {
+  u: 'button-undo',
+  d: 'button-done',
+  r: 'button-remind',
+} as const satisfies Record<DoesToEntry, SentenceKey>;
 
 /** The plain buttons of a remembered reading, marked 1, 2, 3 … as they stand. */
 export function buttonsFor(ref: string, does: readonly (keyof typeof LABELS)[]): Button[] {
@@ -33,26 +53,43 @@ export function buttonsFor(ref: string, does: readonly (keyof typeof LABELS)[]):
   }));
 }
 
+/** The buttons of an entry of the log, marked 1, 2, 3 … as they stand. */
+export function entryButtons(entry: number, does: readonly DoesToEntry[]): Button[] {
+  return does.map((one, at) => ({
+    key: `${one}:${entry}`,
+    mark: String(at + 1),
+    label: ENTRY_LABELS[one],
+    values: { entry: String(entry) },
+  }));
+}
+
 /** Which buttons apply under a dose. */
 export interface Applies {
+  /** Whether the dose is for a vessel and one amount, so that it can be noted when it went in. */
+  readonly mayBeNoted: boolean;
   readonly stageAssumed: boolean;
   readonly mayBeRed: boolean;
+  /** Whether a vessel is named whose colour nobody has told. */
+  readonly colourUnknown: boolean;
   readonly cautionsShort: boolean;
 }
 
 /**
- * The weightiest four under a dose: the stage, the colour, the cautions where they stand in one line, the working,
- * another target; `More` comes last and leads to all the rest.
+ * The weightiest under a dose: that it went in, that somebody does it now, the stage, the colour, the cautions where they
+ * stand in one line, the working, another target; `More` comes last and leads to all the rest.
  */
 export function doseButtons(ref: string, applies: Applies): Button[] {
   const all = [
+    ...(applies.mayBeNoted ? (['a', 'y'] as const) : []),
     ...(applies.stageAssumed ? (['nf'] as const) : []),
-    ...(applies.mayBeRed ? (['red'] as const) : []),
+    ...(applies.mayBeRed || applies.colourUnknown ? (['red'] as const) : []),
+    ...(applies.colourUnknown ? (['white'] as const) : []),
     ...(applies.cautionsShort ? (['s'] as const) : []),
     'w' as const,
     't' as const,
   ];
-  return buttonsFor(ref, [...all.slice(0, MOST_BUTTONS - 1), 'm']);
+  const most = applies.mayBeNoted ? MOST_BUTTONS.vessel : MOST_BUTTONS.none;
+  return buttonsFor(ref, [...all.slice(0, most - 1), 'm']);
 }
 
 /** A button for each way out of a choice that may be taken, the other colour, then all the rest. */
@@ -81,13 +118,13 @@ export function letterButtons(
   ref: string,
   field: AskedField,
   choices: readonly Fields[],
-  mark: DecimalMark,
+  manner: Manner,
 ): Button[] {
   return choices.map((fields, at) => ({
     key: `l:${ref}:${letterAt(at)}`,
     mark: letterAt(at),
     label: labelOf(field, fields, choices),
-    values: { value: choiceText(fields, mark) },
+    values: { value: choiceText(fields, manner) },
   }));
 }
 
@@ -98,7 +135,11 @@ function labelOf(field: AskedField, { additive }: Fields, choices: readonly Fiel
   return amongSolutions && isPowder ? 'choice-powder' : `choice-${field}`;
 }
 
-function choiceText({ additive, tablet_salt_g, tablet_SO2_g }: Fields, mark: DecimalMark): string {
+function choiceText(
+  { additive, tablet_salt_g, tablet_SO2_g, volume_L }: Fields,
+  { mark, volumeUnit }: Manner,
+): string {
+  if (volume_L !== undefined) return volumeText(volume_L, volumeUnit, mark);
   return additive ?? numberText(tablet_salt_g ?? tablet_SO2_g ?? 0, 2, mark);
 }
 
@@ -109,9 +150,17 @@ export interface Pressed {
   readonly which: string;
 }
 
-/** Takes a button's key apart; undefined for one that we never made. */
+/** Takes a button's key apart; undefined for one that is of no reading, or that we never made. */
 export function parseKey(key: string): Pressed | undefined {
-  const match = /^(w|s|t|m|nf|red|c|l):(\d{1,9}\.\d{1,9})(?::([a-z]|\d))?$/.exec(key);
+  const match = /^(w|s|t|m|nf|red|white|c|l|a|y|o|n|gb|ga|gd):(\d{1,9}\.\d{1,9})(?::([a-z]|\d))?$/.exec(key);
   if (!match) return undefined;
   return { does: match[1] as Does, ref: match[2] ?? '', which: match[3] ?? '' };
+}
+
+/** The key of a button of an entry taken apart; undefined for any other. */
+export function parseEntryKey(
+  key: string,
+): { readonly does: DoesToEntry; readonly entry: number } | undefined {
+  const match = /^(u|d|r):(\d{1,9})$/.exec(key);
+  return match ? { does: match[1] as DoesToEntry, entry: Number(match[2]) } : undefined;
 }

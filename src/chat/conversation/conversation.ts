@@ -1,7 +1,11 @@
 import type { CellarView } from '../../core/cellar/cellar-store.ts';
+import { scheduleDaily } from './daily.ts';
 import { arrive } from './here.ts';
+import { eventKey } from './keys.ts';
+import { greeting } from './note.ts';
 import type { IncomingMessage, Handled } from './ports.ts';
 import { handlePress } from './press.ts';
+import { alreadyNoted } from './press/log-buttons.ts';
 import { handleText } from './text.ts';
 import { line } from './lines/line.ts';
 import type { Settings } from './settings.ts';
@@ -21,7 +25,16 @@ export async function handle(
     return { writes: [], replies: [{ language: message.language, lines, buttons: [] }] };
   }
   const here = await arrive(message, view, defaults);
-  return content.kind === 'text'
-    ? handleText(content.text, here, view)
-    : handlePress(content.key, here, view);
+  const before = await view.entriesOfKeys(eventKey(message));
+  // Delivered again: what it noted stands, and only what is asked is answered anew.
+  const fact = before.find(({ kind }) => kind !== 'reading' && kind !== 'vessel');
+  if (fact) return alreadyNoted(fact, here);
+  const done = { ...here, done: new Set(before.map(({ key }) => key)) };
+  const handled =
+    content.kind === 'text'
+      ? await handleText(content.text, done, view)
+      : await handlePress(content.key, done, view);
+  const notes = handled.writes.some(({ kind }) => kind === 'entry');
+  const daily = notes ? await scheduleDaily(done, view) : [];
+  return { ...handled, writes: [...greeting(done), ...handled.writes, ...daily] };
 }

@@ -1,6 +1,6 @@
 import type { CellarView, Person } from '../../core/cellar/cellar-store.ts';
 import type { Vessel } from '../../core/cellar/vessel.ts';
-import { claimKey, memoryKey, planKey, SETTINGS_KEY } from './keys.ts';
+import { claimKey, memoryKey, planKey, SETTINGS_KEY, ZONE_ASKED_KEY } from './keys.ts';
 import { FRESH_MEMORY, type Memory } from './memory.ts';
 import type { Claim, Plan } from './plan.ts';
 import type { IncomingMessage } from './ports.ts';
@@ -34,6 +34,10 @@ export interface Here extends CellarFacts {
   readonly isNewPerson: boolean;
   /** The number that the next entry of the log gets. */
   readonly nextEntry: number;
+  /** Whether the time zone was asked for before. */
+  readonly isZoneAsked: boolean;
+  /** The keys of what the same event has noted before: it is delivered again. */
+  readonly done: ReadonlySet<string>;
 }
 
 /** What is known of the person and the cellar before the message is read. */
@@ -48,8 +52,10 @@ export async function arrive(message: IncomingMessage, view: CellarView, default
     memory: kept === undefined ? FRESH_MEMORY : (JSON.parse(kept) as Memory),
     settings: { ...mergeSettings(defaults, set), language: message.language },
     me: known?.number ?? Math.max(0, ...people.map(({ number }) => number)) + 1,
-    isNewPerson: known === undefined || known.name !== message.name,
+    isNewPerson: known === undefined || (message.name !== undefined && known.name !== message.name),
     nextEntry: await view.nextEntry(),
+    isZoneAsked: (await view.kept(ZONE_ASKED_KEY)) !== undefined,
+    done: new Set(),
   };
 }
 

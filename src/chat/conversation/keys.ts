@@ -3,6 +3,9 @@ import type { Who } from './ports.ts';
 /** What the cellar has set. */
 export const SETTINGS_KEY = 'settings';
 
+/** Whether the time zone was asked for once. */
+export const ZONE_ASKED_KEY = 'zone asked';
+
 /** One person's conversation in one chat. */
 export function memoryKey({ chat, person }: Pick<Who, 'chat' | 'person'>): string {
   return `memory ${JSON.stringify([chat, person])}`;
@@ -26,4 +29,14 @@ export function planKey(vessel: string): string {
 /** What an event writes into the log begins with this, so that the same event never writes twice. */
 export function eventKey({ chat, id }: { readonly chat: string; readonly id: string }): string {
   return `${JSON.stringify([chat, id])} `;
+}
+
+/** Something that is to be said in a chat: one of its kind and matter. */
+export function dueId(kind: 'daily' | 'remind', chat: string, of: string): string {
+  return `${kind} ${JSON.stringify([chat, of])}`;
+}
+
+/** Which due thing is the next daily list of a chat. */
+export function dailyKey(chat: string): string {
+  return `daily ${chat}`;
 }

@@ -1,7 +1,10 @@
 import type { Reading, Understood, VolumeUnit } from '../reader/understood.ts';
 import type { DecimalMark } from '../replies/number-text.ts';
+import { dayText } from '../replies/moment-text.ts';
 import { concentrationText, molecularText } from '../replies/quantity-text.ts';
-import type { Settings, UnitSystem } from './settings.ts';
+import type { UnitSystem } from './settings.ts';
+import type { Here } from './here.ts';
+import { zoneOf } from './zone.ts';
 
 /** How this person writes figures, so that the reply is in their units and with their decimal mark. */
 export interface Manner {
@@ -10,19 +13,22 @@ export interface Manner {
   readonly unit: 'mg/L' | 'ppm';
   readonly volumeUnit: VolumeUnit;
   readonly units: UnitSystem;
+  /** The day of a moment, as this person's language and the cellar's calendar have it. */
+  readonly day: (at: number) => string;
 }
 
 /** The manner of one reading of a message. */
 export function mannerOf(
   reading: Reading,
   decimalMark: Understood['decimalMark'],
-  settings: Settings,
+  { settings, message }: Pick<Here, 'settings' | 'message'>,
 ): Manner {
   return {
     mark: decimalMark,
     unit: reading.concentrationUnit === 'ppm' ? 'ppm' : 'mg/L',
     volumeUnit: reading.volumeUnit ?? settings.volumeUnit,
     units: systemOf(reading.volumeUnit) ?? settings.units,
+    day: (at) => dayText(at, { zone: zoneOf(settings), language: settings.language, now: message.at }),
   };
 }
 

@@ -12,20 +12,19 @@ export interface Note {
   readonly key?: string;
 }
 
-/** The writes that note things in the log, in their order; and the person who notes them, if they are new. */
+/** The writes that note things in the log, in their order; what the same event has noted before is not noted again. */
 export function noting(here: Here, notes: readonly Note[]): Write[] {
-  const { message, me } = here;
+  const { message, me, done } = here;
   const event = eventKey(message);
-  return [
-    ...(here.isNewPerson ? [personOf(here)] : []),
-    ...notes.map(({ happening, at, key }, place): Write => ({
-      kind: 'entry',
-      entry: { ...happening, key: key ?? `${event}${place}`, at, noted_at: message.at, by: me },
-    })),
-  ];
+  return notes.flatMap(({ happening, at, key = '' }, place): Write[] => {
+    const own = key === '' ? `${event}${place}` : key;
+    if (done.has(own)) return [];
+    return [{ kind: 'entry', entry: { ...happening, key: own, at, noted_at: message.at, by: me } }];
+  });
 }
 
-function personOf({ message, me }: Here): Write {
+/** The write that makes a new person known, or the new name of one. */
+export function greeting({ message, me, isNewPerson }: Here): Write[] {
   const { person, name } = message;
-  return { kind: 'person', id: person, number: me, ...(name !== undefined && { name }) };
+  return isNewPerson ? [{ kind: 'person', id: person, number: me, ...(name !== undefined && { name }) }] : [];
 }

@@ -36,6 +36,23 @@ export interface IncomingMessage extends Who {
 /** What core answers to one reading. */
 export type Answer = DoseAnswer | EffectAnswer | AddedAnswer | SolutionAnswer;
 
+/** Something with files that the edge does once the message's writes are durable. Times in milliseconds since 1970. */
+export type Errand =
+  | {
+      readonly kind: 'export';
+      readonly from?: number;
+      readonly to?: number;
+      readonly vessel?: string;
+      /** Names the stretch in the file's name. */
+      readonly span: string;
+      readonly format: 'csv' | 'xlsx';
+      readonly zone: string;
+      readonly language: Language;
+      readonly decimalMark: '.' | ',';
+    }
+  | { readonly kind: 'import'; readonly file: string; readonly language: Language }
+  | { readonly kind: 'backup'; readonly language: Language };
+
 /** Handling a message returns its writes and its replies as data; the edge commits, then sends. */
 export interface Handled {
   readonly writes: readonly Write[];
@@ -44,6 +61,7 @@ export interface Handled {
   readonly understood?: Understood;
   /** One element a reading; `null` where nothing may be said. */
   readonly answers?: readonly (Answer | null)[];
+  readonly errand?: Errand;
 }
 
 /** The conversation, as the edges have it: it looks at the cellar, and neither writes nor sends. */

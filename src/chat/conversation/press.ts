@@ -4,7 +4,7 @@ import type { Reading } from '../reader/understood.ts';
 import type { DecimalMark } from '../replies/number-text.ts';
 import type { Line } from '../replies/reply.ts';
 import { answerSingle } from './answer-single.ts';
-import { parseKey, type Pressed } from './buttons.ts';
+import { parseEntryKey, parseKey, type Does } from './buttons.ts';
 import { checkFields } from './check-fields.ts';
 import { complete } from './complete.ts';
 import { withVessels, type Here } from './here.ts';
@@ -16,6 +16,9 @@ import type { Memory, Remembered } from './memory.ts';
 import { keeping, waitFor } from './next-memory.ts';
 import type { Handled } from './ports.ts';
 import { chosen } from './press/chosen.ts';
+import { pressEntry } from './press/entry-buttons.ts';
+import { claimDose, noteDose, noteWorkedOut, orderDose } from './press/log-buttons.ts';
+import { answerSampled } from './press/sampled.ts';
 import { moreLines, safetyLines, workingOf } from './press/shown-again.ts';
 import { asSaid } from './recall.ts';
 import type { Settings } from './settings.ts';
@@ -26,21 +29,42 @@ import { mannerOf } from './manner.ts';
 /** A button that was pressed: it means the same however often, and an old or unknown one gets a kind line. */
 export async function handlePress(key: string, here: Here, view: CellarView): Promise<Handled> {
   const { settings, message } = here;
+  const ofEntry = parseEntryKey(key);
+  if (ofEntry) return pressEntry(ofEntry, here, view);
   const button = parseKey(key);
   const kept = button && (await view.kept(readingKey(button.ref)));
   const found = kept === undefined ? undefined : (JSON.parse(kept) as Remembered);
   // A button is for those who see it.
   if (!button || found?.chat !== message.chat) return saying(settings, [line('first', 'old-button')]);
-  return pressed(button, found, await withVessels(here, view, vesselsIn(found.reading.fields)));
+  const near = await withVessels(here, view, vesselsIn(found.reading.fields));
+  switch (button.does) {
+    case 'a':
+      return noteDose(found, near, view);
+    case 'n':
+      return noteWorkedOut(found, near, view);
+    case 'o':
+      return orderDose(found, near, view);
+    case 'gb':
+    case 'ga':
+    case 'gd':
+      return answerSampled(found, button.does, near, view);
+    default:
+      return pressed(button.does, button.which, found, near);
+  }
 }
 
-function pressed({ does, which }: Pressed, found: Remembered, here: Here): Handled {
-  const { memory, settings } = here;
+function pressed(
+  does: Exclude<Does, 'a' | 'n' | 'o' | 'gb' | 'ga' | 'gd'>,
+  which: string,
+  found: Remembered,
+  here: Here,
+): Handled {
+  const { settings } = here;
   const again = (reading: Reading, chosenNow = false): Handled =>
     answerAgain(checkFields(reading), here, chosenNow);
   switch (does) {
     case 'w':
-      return saying(settings, workingOf(found.reading, markOf(memory), settings));
+      return saying(settings, workingOf(found.reading, here));
     case 's':
       return saying(settings, safetyLines(found.reading));
     case 'm':
@@ -48,11 +72,14 @@ function pressed({ does, which }: Pressed, found: Remembered, here: Here): Handl
     case 'nf':
       return again(complete(statedOf(found), { fields: { stage: 'malolactic' } }, settings));
     case 'red':
-      return again(complete(found.reading, { fields: { style: 'red' } }, settings));
+    case 'white':
+      return again(complete(found.reading, { fields: { style: does } }, settings));
+    case 'y':
+      return claimDose(found, here);
     case 't':
       return askTarget(found, here);
     case 'c': {
-      const choice = chosen(found.reading, Number(which), markOf(memory), settings);
+      const choice = chosen(found.reading, Number(which), here);
       if (choice === undefined) return saying(settings, [line('first', 'old-button')]);
       if ('lines' in choice) return saying(settings, choice.lines);
       return again(complete(found.reading, { fields: { target: choice.target } }, settings), true);
@@ -98,7 +125,7 @@ function answerAgain(reading: Reading, here: Here, isOffer: boolean): Handled {
 
 function moreOf(found: Remembered, here: Here): Handled {
   const { memory, settings } = here;
-  const { lines, buttons } = moreLines(found, markOf(memory), settings);
+  const { lines, buttons } = moreLines(found, here);
   const next: Memory = { ...memory, lastButtons: buttons.map(({ key }) => key) };
   return { writes: keeping(here, next), replies: [{ language: settings.language, lines, buttons }] };
 }
@@ -113,7 +140,7 @@ function askTarget({ ref, reading }: Remembered, here: Here): Handled {
   const next: Memory = mayWaitFor('target', without)
     ? { ...others, waiting: waitFor('target', { ref, reading: asSaid(without), at: message.at }, settings) }
     : { ...others, askedTarget: { at: message.at, reading: without }, lastButtons: [] };
-  const manner = mannerOf(without, markOf(memory), settings);
+  const manner = mannerOf(without, markOf(memory), here);
   const question = questionLine('target', without, manner, settings, 'first');
   const ofWhich = line('first', 'target-of', { vessel: vesselText(reading) });
   return { ...saying(settings, [ofWhich, question]), writes: keeping(here, next) };

@@ -1,8 +1,10 @@
-import type { Known, Vessel } from '../../core/cellar/vessel.ts';
+import type { AdditiveNoted } from '../../core/cellar/entry.ts';
+import type { Vessel } from '../../core/cellar/vessel.ts';
 import { DAY_ms } from '../../core/time/durations.ts';
 import { finishReading } from '../reader/finish-reading.ts';
 import type { FieldName, Fields, Reading } from '../reader/understood.ts';
 import type { Here } from './here.ts';
+import type { Plan } from './plan.ts';
 
 /** What is filled in from memory, by what is asked. Free SO2 never is: it is measured. */
 const FILLED: Readonly<Partial<Record<Reading['intent'], readonly FieldName[]>>> = {
@@ -21,8 +23,10 @@ const FILLED: Readonly<Partial<Record<Reading['intent'], readonly FieldName[]>>>
   added: ['volume_L'],
 };
 
+type Facts = Partial<Record<FieldName, { readonly value: unknown; readonly at: number }>>;
+
 /** The facts about a vessel by the names of the fields that they stand for. */
-function factsOf(vessel: Vessel, oldest_pH: number): Partial<Record<FieldName, Known<unknown>>> {
+function factsOf(vessel: Vessel, oldest_pH: number): Facts {
   const { volume_L, ph, traits } = vessel;
   return {
     ...traits,
@@ -31,14 +35,42 @@ function factsOf(vessel: Vessel, oldest_pH: number): Partial<Record<FieldName, K
   };
 }
 
-/** The additive that is used for this vessel, where none is named. */
-function usualOf({ usual }: Vessel, { fields, marks }: Reading): Partial<Record<FieldName, Known<unknown>>> {
-  if (usual === undefined || fields.additive !== undefined || marks.unnamedAdditive || marks.campden)
-    return {};
-  const { additive, strength_percent } = usual.value;
+/** The additive where none is named: of an addition what was planned, else what is used for this vessel. */
+function additiveFor({ intent, fields, marks }: Reading, name: string, here: Here): Facts {
+  if (fields.additive !== undefined || marks.unnamedAdditive || marks.campden) return {};
+  const plan = intent === 'added' ? here.plans.get(name) : undefined;
+  if (plan && isMeasuredAlike(plan, fields)) return additiveFacts(plan, plan.at);
+  const usual = here.vessels.get(name)?.usual;
+  return usual ? additiveFacts(usual.value, usual.at) : {};
+}
+
+/** Grams were planned and grams went in; a solution is planned and told in millilitres, Campden tablets by their number. */
+function isMeasuredAlike(plan: Plan, fields: Fields): boolean {
+  if (fields.added_mg_L !== undefined) return true;
+  return (['mass_g', 'additive_volume_mL', 'tablets'] as const).some(
+    (amount) => plan[amount] !== undefined && fields[amount] !== undefined,
+  );
+}
+
+function additiveFacts(noted: AdditiveNoted, at: number): Facts {
+  const names = ['additive', 'strength_percent', 'tablet_SO2_g', 'tablet_salt_g'] as const;
+  return Object.fromEntries(
+    names.flatMap((name) => (noted[name] === undefined ? [] : [[name, { value: noted[name], at }]])),
+  );
+}
+
+/** A dose that is computed from a target, where neither an allowance nor a share was said, gets the cellar's allowance. */
+export function withAllowance(reading: Reading, { settings }: Pick<Here, 'settings'>): Reading {
+  const { intent, fields, recalled, problems } = reading;
+  const { allowance_percent: percent } = settings;
+  if (percent === undefined || intent !== 'dose' || problems.length > 0) return reading;
+  if (fields.binding_allowance_percent !== undefined || fields.binding_share !== undefined) return reading;
+  if (fields.target !== undefined && 'add_mg_L' in fields.target) return reading;
   return {
-    ...(additive && { additive: { ...usual, value: additive } }),
-    ...(strength_percent !== undefined && { strength_percent: { ...usual, value: strength_percent } }),
+    ...reading,
+    fields: { ...fields, binding_allowance_percent: percent },
+    // Of no time: it is a setting.
+    recalled: { ...recalled, binding_allowance_percent: 0 },
   };
 }
 
@@ -48,15 +80,14 @@ function usualOf({ usual }: Vessel, { fields, marks }: Reading): Partial<Record<
  */
 export function recall(reading: Reading, here: Here): Reading {
   const { fields, intent, problems, marks } = reading;
-  const vessel = fields.vessel === undefined ? undefined : here.vessels.get(fields.vessel);
   const names = FILLED[intent];
-  if (vessel === undefined || names === undefined || problems.length > 0) return reading;
-  const facts = factsOf(vessel, here.message.at - here.settings.ph_days * DAY_ms);
-  const wanted = { ...usualOf(vessel, reading), ...only(facts, names) };
+  if (fields.vessel === undefined || names === undefined || problems.length > 0) return reading;
+  const vessel = here.vessels.get(fields.vessel);
+  const facts = vessel ? factsOf(vessel, here.message.at - here.settings.ph_days * DAY_ms) : {};
+  const wanted = { ...additiveFor(reading, fields.vessel, here), ...only(facts, names) };
+  const isAsked = marks.volumeChoices ?? marks.fruitByWeight ?? marks.eachOrTotal;
   const fresh = Object.entries(wanted).filter(
-    ([name]) =>
-      fields[name as keyof Fields] === undefined &&
-      !(name === 'volume_L' && (marks.volumeChoices || marks.fruitByWeight || marks.eachOrTotal)),
+    ([name]) => fields[name as keyof Fields] === undefined && !(name === 'volume_L' && isAsked),
   );
   if (fresh.length === 0) return reading;
   const { assumed: _assumed, asks: _asks, ...draft } = reading;
@@ -70,10 +101,7 @@ export function recall(reading: Reading, here: Here): Reading {
   );
 }
 
-function only<T>(
-  facts: Partial<Record<FieldName, T>>,
-  names: readonly FieldName[],
-): Partial<Record<FieldName, T>> {
+function only(facts: Facts, names: readonly FieldName[]): Facts {
   return Object.fromEntries(
     names.flatMap((name) => (facts[name] === undefined ? [] : [[name, facts[name]]])),
   );

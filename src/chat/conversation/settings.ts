@@ -1,4 +1,3 @@
-import type { AdditiveNoted } from '../../core/cellar/entry.ts';
 import type { Basis } from '../../core/wine.ts';
 import { READER_DEFAULTS } from '../reader/reader-defaults.ts';
 import type { ReaderSettings } from '../reader/understood.ts';
@@ -73,9 +72,4 @@ export function mergeSettings(defaults: Settings, kept: string | undefined): Set
   if (kept === undefined) return defaults;
   const set = JSON.parse(kept) as CellarSettings;
   return { ...defaults, ...set, targets: { ...defaults.targets, ...set.targets } };
-}
-
-/** The additive that is taken where none is named. */
-export function usualAdditiveOf({ usualAdditive, usualStrength }: Settings): AdditiveNoted {
-  return { additive: usualAdditive, ...usualStrength };
 }

@@ -10,6 +10,7 @@ import { checkFields } from './check-fields.ts';
 import { choiceByWords } from './choice-by-words.ts';
 import { answers, asAnswered, complete, completeWaiting } from './complete.ts';
 import { withVessels, type Here } from './here.ts';
+import { answerCommand } from './intents/command/command.ts';
 import { keepManner } from './keep-manner.ts';
 import type { Memory, Waiting } from './memory.ts';
 import type { Handled } from './ports.ts';
@@ -35,7 +36,10 @@ export async function handleText(text: string, here: Here, view: CellarView): Pr
   if (alone) return alone;
   const whole = completed(understood, waiting, settings);
   const near = await withVessels(here, view, vesselsNamed(whole));
-  if (whole.readings.length !== 1) return answerRound(checked(whole), near);
+  const [only, another] = whole.readings;
+  if (only === undefined || another) return answerRound(checked(whole), near);
+  const commanded = only.intent === 'command' ? await answerCommand(only, near, view) : undefined;
+  if (commanded) return { ...commanded, understood: whole, answers: [null] };
   return answerSingle(checked(whole), near, { completes: whole !== understood });
 }
 

@@ -33,8 +33,10 @@ function pick<K extends keyof Fields>(fields: Fields, keys: readonly K[]): Pick<
 export function additiveOf(reading: Reading): AdditiveAtHand | undefined {
   const id = reading.fields.additive ?? reading.assumed.additive;
   if (id === undefined || reading.asks.some((field) => SETTLES_ADDITIVE.includes(field))) return undefined;
+  const { strength_percent: usual } = reading.assumed;
   return {
     id,
+    ...(usual !== undefined && { strength_percent: usual }),
     ...pick(reading.fields, ['strength_percent', 'tablet_SO2_g', 'tablet_salt_g']),
     ...(reading.strength_of && { strength_of: reading.strength_of }),
   };

@@ -34,6 +34,7 @@ export function waitsFor(reading: Reading): AskedField | undefined {
 
 /** The values to choose from where a field has few, in the order of their letters. */
 export function choicesFor(field: AskedField, reading: Reading, settings: Settings): readonly Fields[] {
+  if (field === 'volume_L') return (reading.marks.volumeChoices ?? []).map((volume_L) => ({ volume_L }));
   if (field === 'tablet_salt_g') return TABLET_SALT_g.map((tablet_salt_g) => ({ tablet_salt_g }));
   if (field === 'tablet_SO2_g') return TABLET_SO2_g.map((tablet_SO2_g) => ({ tablet_SO2_g }));
   if (field !== 'additive') return [];

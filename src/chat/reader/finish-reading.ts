@@ -19,6 +19,13 @@ function usualTarget({ style, category }: Fields, { targets }: ReaderSettings): 
   return { molecular_mg_L: style === 'red' ? targets.red : targets.white };
 }
 
+/** The additive that is taken where none is named, with its strength where it is not pure. */
+function usualAdditive({ usualAdditive: additive, usualStrength }: ReaderSettings): Assumed {
+  return usualStrength === undefined
+    ? { additive }
+    : { additive, strength_percent: usualStrength.strength_percent };
+}
+
 /** What is missing of the additive: its name, its strength, the size of its tablet. */
 function askAdditive({ marks }: Draft, fields: Fields, asks: Set<AskedField>): void {
   const { additive } = fields;
@@ -58,7 +65,7 @@ function work(
   const base: Assumed = { ...(volume_L === undefined ? {} : { volume_L }), ...gallon };
   const unknownVolume = fields.volume_L === undefined && volume_L === undefined;
   const nameless = fields.additive === undefined && !marks.unnamedAdditive && !marks.campden;
-  const additive: Assumed = nameless ? { additive: settings.usualAdditive } : {};
+  const additive: Assumed = nameless ? usualAdditive(settings) : {};
   const vesselless = fields.vessel === undefined && fields.vessels === undefined;
   if (intent === 'dose') {
     const stage = fields.stage ?? 'finished';

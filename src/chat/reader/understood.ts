@@ -176,6 +176,8 @@ export interface Reading {
   readonly recalled?: Readonly<Partial<Record<FieldName, number>>>;
   /** Fields that the log has had from this person already, when the reading goes on over several messages. */
   readonly noted?: readonly FieldName[];
+  /** The key of the event that noted them, when buttons of the reading may still move its time. */
+  readonly event?: string;
   /** Whether the sample was taken before or after the last addition, where that was asked; `dose` wants one all the same. */
   readonly sampled?: 'before' | 'after' | 'dose';
   /** What else was read that steers what is asked. */

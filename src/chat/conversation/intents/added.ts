@@ -1,7 +1,7 @@
 import { added } from '../../../core/dose/added.ts';
 import type { AddedAnswer } from '../../../core/dose/answer.ts';
 import type { Reading } from '../../reader/understood.ts';
-import type { Line } from '../../replies/reply.ts';
+import { additionOf } from '../addition-of.ts';
 import { buttonsFor } from '../buttons.ts';
 import { statedAmount } from '../lines/amount-text.ts';
 import { assumedLines } from '../lines/assumed.ts';
@@ -11,37 +11,70 @@ import { vesselText } from '../lines/vessel.ts';
 import { workingLines } from '../lines/working.ts';
 import { perLitre } from '../manner.ts';
 import type { Outcome, Turn } from '../outcome.ts';
+import { momentText } from '../../replies/moment-text.ts';
+import { tellingOf } from '../telling.ts';
 import { additiveOf, toAddedRequest } from '../to-requests.ts';
+import { whenOf } from '../when.ts';
 import { missing } from './missing.ts';
+import { notedAddition } from './noted-addition.ts';
 
-/** An addition that was made: what follows from it, and that nothing is kept yet. */
+/**
+ * An addition that was made is a fact: it is noted at once, with what is odd about it. Only an amount that had to be
+ * worked out is confirmed first.
+ */
 export function answerAdded(reading: Reading, turn: Turn): Outcome {
   if (reading.asks.length > 0) return missing(reading, turn);
-  const { manner } = turn;
+  const when = whenOf(reading, turn.here);
+  if (when.is === 'future' || when.is === 'no-such-day') return notYet(reading, when.at, when.is, turn);
   const answer = added(toAddedRequest(reading));
-  const first = firstOfAdded(reading, answer, turn);
+  if (isWorkedOut(reading)) return confirmed(reading, answer, turn);
+  const addition = additionOf(reading, answer, turn.here);
+  const noted = notedAddition({ happening: addition, at: when.at }, turn);
+  const { manner } = turn;
+  return {
+    ...noted,
+    answer,
+    lines: [
+      ...noted.lines,
+      ...(when.is === 'noon' ? [line('assumed', 'when-noon')] : []),
+      ...factLines(reading, manner),
+      ...assumedLines(reading, manner),
+      ...workingLines(answer.steps, manner),
+    ],
+  };
+}
+
+/** Only mg/L were said: what that is in grams or millilitres is our figure and not theirs. */
+function isWorkedOut({ fields }: Reading): boolean {
+  const { mass_g, additive_volume_mL, tablets } = fields;
+  return mass_g === undefined && additive_volume_mL === undefined && tablets === undefined;
+}
+
+function confirmed(reading: Reading, answer: AddedAnswer, turn: Turn): Outcome {
+  const { manner } = turn;
+  const additive = additiveOf(reading) ?? { id: 'potassium-metabisulfite' };
+  const worked = statedAmount(answer, additive, manner.mark);
+  const gave = answer.added_mg_L === undefined ? 'none' : perLitre(answer.added_mg_L, manner);
+  const values = { vessel: vesselText(reading), added: gave };
+  const first = worked
+    ? { ...line('first', 'added-confirm', values), list: [worked] }
+    : line('first', 'added-confirm-bare', values);
   return {
     answer,
     inRound: [first],
     lines: [
       first,
-      line('condition', 'not-kept-addition'),
-      line('effect', 'measure-tomorrow'),
       ...factLines(reading, manner),
       ...assumedLines(reading, manner),
       ...workingLines(answer.steps, manner),
     ],
-    buttons: answer.steps.length > 0 ? buttonsFor(turn.ref, ['w', 's']) : [],
+    buttons: buttonsFor(turn.ref, ['n', 'w']),
   };
 }
 
-function firstOfAdded(reading: Reading, answer: AddedAnswer, { manner }: Turn): Line {
-  const vessel = vesselText(reading);
-  const additive = additiveOf(reading) ?? { id: 'potassium-metabisulfite' };
-  const stated = statedAmount(reading.fields, additive, manner.mark);
-  const worked = statedAmount(answer, additive, manner.mark);
-  const gave = answer.added_mg_L === undefined ? 'none' : perLitre(answer.added_mg_L, manner);
-  if (stated) return { ...line('first', 'added', { vessel, added: gave }), list: [stated] };
-  if (worked) return { ...line('first', 'added-worked', { vessel, added: gave }), list: [worked] };
-  return line('first', 'added-bare', { vessel, added: gave });
+function notYet(reading: Reading, at: number, key: 'future' | 'no-such-day', turn: Turn): Outcome {
+  const when = momentText(at, tellingOf(turn.here));
+  const values = { vessel: vesselText(reading), when, text: reading.when?.text ?? '' };
+  const first = line('first', `when-${key}`, values);
+  return { answer: null, inRound: [first], lines: [first], buttons: [] };
 }

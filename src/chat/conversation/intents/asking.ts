@@ -22,7 +22,7 @@ export function questionFor(
   manner: Manner,
   settings: Settings,
 ): Question {
-  const buttons = letterButtons(ref, field, choicesFor(field, reading, settings), manner.mark);
+  const buttons = letterButtons(ref, field, choicesFor(field, reading, settings), manner);
   const options = buttons.map(({ mark: letter, label, values }) => ({
     ...line(room, 'option', { mark: letter }),
     list: [{ key: label, values }],

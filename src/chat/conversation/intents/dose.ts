@@ -20,7 +20,9 @@ import { vesselText } from '../lines/vessel.ts';
 import { underLines, warningLines } from '../lines/warnings.ts';
 import { workingLines } from '../lines/working.ts';
 import type { Outcome, Turn } from '../outcome.ts';
+import { toBeWeighed } from '../to-be-weighed.ts';
 import { additiveOf, toDoseRequest } from '../to-requests.ts';
+import { vesselsIn } from '../vessels-named.ts';
 import { fermentStop } from './ferment-stop.ts';
 import { noDose } from './no-dose.ts';
 import { notPermitted } from './not-permitted.ts';
@@ -83,12 +85,19 @@ function wholeDose(reading: Reading, request: DoseRequest, answer: DoseAnswer, t
       ...cautionLines(additive, inFull),
     ],
     buttons: doseButtons(ref, {
+      mayBeNoted: vesselsIn(reading.fields).length > 0 && toBeWeighed(reading, answer) !== undefined,
       stageAssumed: reading.assumed.stage !== undefined,
       mayBeRed: redFigures(answer) !== undefined,
+      colourUnknown: isColourUnknown(reading),
       cautionsShort: !inFull,
     }),
     ...(inFull && { cautioned: additive.id }),
   };
+}
+
+/** Whether a vessel is named whose colour nobody has told. */
+function isColourUnknown({ fields }: Reading): boolean {
+  return fields.vessel !== undefined && fields.style === undefined && fields.product === undefined;
 }
 
 /** Without allowance or share the line about landing says what a low free SO2 means. */
@@ -146,8 +155,10 @@ function nothing(reading: Reading, answer: DoseAnswer, turn: Turn): Outcome {
       ...warningLines(answer.warnings, manner, 'warning', ['rounding-coarse']),
     ],
     buttons: doseButtons(ref, {
+      mayBeNoted: false,
       stageAssumed: reading.assumed.stage !== undefined,
       mayBeRed: false,
+      colourUnknown: isColourUnknown(reading),
       cautionsShort: false,
     }),
   };

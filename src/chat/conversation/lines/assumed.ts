@@ -1,11 +1,13 @@
 import type { AdditiveId } from '../../../core/additives/additive-id.ts';
 import { ADDITIVES } from '../../../core/additives/additives.ts';
-import type { Reading } from '../../reader/understood.ts';
+import type { FieldName, Fields, Reading } from '../../reader/understood.ts';
+import { numberText } from '../../replies/number-text.ts';
 import type { Line } from '../../replies/reply.ts';
 import { volumeText } from '../../replies/volume-text.ts';
 import type { SentenceKey } from '../../replies/sentence-keys.ts';
 import type { Manner } from '../manner.ts';
 import { countOf } from '../to-requests.ts';
+import { partsOf, strengthKind } from './facts.ts';
 import { listLine, part } from './line.ts';
 import { noteParts } from './notes.ts';
 import { targetValues } from './target-text.ts';
@@ -19,17 +21,48 @@ type Part = Omit<Line, 'room'>;
 export function assumedLines(reading: Reading, manner: Manner, weighs = true): Line[] {
   const set = reading.setAside.map((text) => part('set-aside-figure', { text }));
   return [
-    ...listLine('assumed', 'assumed', [...filledIn(reading, manner, weighs), ...noteParts(reading, manner)]),
+    ...listLine('assumed', 'assumed', [
+      ...recalledParts(reading, manner, weighs),
+      ...filledIn(reading, manner, weighs),
+      ...noteParts(reading, manner),
+    ]),
     ...listLine('assumed', 'set-aside', set),
   ];
+}
+
+/** What is known of the vessel and was not said, each with the day that it is of. */
+function recalledParts(reading: Reading, manner: Manner, weighs: boolean): Part[] {
+  const { recalled = {}, fields } = reading;
+  return Object.entries(recalled).flatMap(([name, at]): Part[] => {
+    if (name === 'binding_allowance_percent')
+      return [
+        part('recalled-allowance', {
+          percent: numberText(fields.binding_allowance_percent ?? 0, 1, manner.mark),
+        }),
+      ];
+    if (name === 'strength_percent' || (name === 'additive' && !weighs)) return [];
+    const day = manner.day(at);
+    if (name === 'additive') return [part('recalled-additive', { day, additive: fields.additive ?? '' })];
+    const value = { [name]: fields[name as FieldName] } as Fields;
+    return [{ ...part('recalled', { day }), list: partsOf(reading, value, manner) }];
+  });
 }
 
 function filledIn(reading: Reading, manner: Manner, weighs: boolean): Part[] {
   const { assumed, fields, asks } = reading;
   const parts: Part[] = [];
   const additive = assumed.additive ?? powderWithoutPurity(reading);
+  const strength = assumed.additive === undefined ? undefined : assumed.strength_percent;
   if (weighs && additive !== undefined && !asks.includes('additive'))
-    parts.push(part('assumed-additive', { additive }));
+    parts.push(
+      strength === undefined
+        ? part('assumed-additive', { additive })
+        : part('fact-strength', {
+            additive,
+            strength: numberText(strength, 2, manner.mark),
+            kind: strengthKind(additive, strength),
+          }),
+    );
   if (assumed.target) parts.push(part(targetKey(fields), targetValues(assumed.target, manner)));
   if (assumed.gallon) parts.push(part('assumed-gallon', { gallon: assumed.gallon }));
   if (assumed.volume_L !== undefined)
@@ -43,9 +76,10 @@ function filledIn(reading: Reading, manner: Manner, weighs: boolean): Part[] {
 }
 
 /** A powder that was named without its purity is reckoned as pure too. */
-function powderWithoutPurity({ intent, fields, marks }: Reading): AdditiveId | undefined {
+function powderWithoutPurity({ intent, fields, marks, recalled }: Reading): AdditiveId | undefined {
   const { additive, strength_percent, tablet_salt_g } = fields;
   if (additive === undefined || ADDITIVES[additive].kind !== 'powder' || marks.campden) return undefined;
+  if (recalled?.additive !== undefined) return undefined;
   if (strength_percent !== undefined || tablet_salt_g !== undefined) return undefined;
   return intent === 'dose' || intent === 'effect' || intent === 'added' ? additive : undefined;
 }

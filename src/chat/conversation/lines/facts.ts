@@ -7,6 +7,7 @@ import { volumeText } from '../../replies/volume-text.ts';
 import type { SentenceKey } from '../../replies/sentence-keys.ts';
 import type { Manner } from '../manner.ts';
 import { countOf } from '../to-requests.ts';
+import { saidFields } from '../recall.ts';
 import { listLine, part } from './line.ts';
 import { targetValues } from './target-text.ts';
 
@@ -19,7 +20,11 @@ export function factLines(reading: Reading, manner: Manner): Line[] {
 
 /** The facts that a reading states, as parts of a list. */
 export function factsOf(reading: Reading, manner: Manner): Part[] {
-  const { fields } = reading;
+  return partsOf(reading, saidFields(reading), manner);
+}
+
+/** Some fields of a reading, as parts of a list. */
+export function partsOf(reading: Reading, fields: Fields, manner: Manner): Part[] {
   const said = (value: number): string => numberText(value, 2, manner.mark);
   const figures: Part[] = [];
   const figure = (name: keyof Fields, key: SentenceKey, as: (value: number) => Line['values']): void => {
@@ -67,7 +72,7 @@ function tabletOf({ additive, tablet_SO2_g, tablet_salt_g }: Fields, { mark }: M
 }
 
 /** How a strength was read; a bisulfite's has a note of its own among the assumptions. */
-function strengthKind(additive: AdditiveId, strength_percent: number): string {
+export function strengthKind(additive: AdditiveId, strength_percent: number): string {
   if (additive.includes('bisulfite-solution') && !additive.includes('meta')) return 'noted';
   const read = readStrength(additive, strength_percent, false, true);
   return 'kind' in read ? read.kind : 'noted';

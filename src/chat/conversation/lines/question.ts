@@ -2,6 +2,7 @@ import { STAGES_WITHOUT_TARGET } from '../../../core/wine.ts';
 import { hasNoUsualTarget } from '../../reader/finish-reading.ts';
 import type { AskedField, Reading } from '../../reader/understood.ts';
 import type { Line } from '../../replies/reply.ts';
+import { volumeText } from '../../replies/volume-text.ts';
 import type { Manner } from '../manner.ts';
 import type { Settings } from '../settings.ts';
 import { vesselText } from './vessel.ts';
@@ -28,6 +29,8 @@ function questionOf(
 ): Omit<Line, 'room'> {
   if (field === 'volume_L') {
     if (noteText(reading, 'fruit-by-weight') !== undefined) return { key: 'ask-fruit', values: {} };
+    const { volumeChoices: [said_L, known_L] = [] } = reading.marks;
+    if (said_L !== undefined) return whichVolume(said_L, known_L, manner);
     return { key: 'ask-volume_L', values: { unit: settings.volumeUnit, count: countText(reading) } };
   }
   if (field === 'target') return targetQuestion(reading, manner, settings);
@@ -38,6 +41,15 @@ function questionOf(
   if (field === 'strength_percent')
     return { key: 'ask-strength_percent', values: { named: reading.fields.additive ?? 'other' } };
   return { key: `ask-${field}`, values: { unit: manner.unit } };
+}
+
+/** A volume that is far from the one known, or more than the vessel holds. */
+function whichVolume(said_L: number, known_L: number | undefined, manner: Manner): Omit<Line, 'room'> {
+  const text = (volume_L: number): string => volumeText(volume_L, manner.volumeUnit, manner.mark);
+  return {
+    key: 'ask-volume-which',
+    values: { said: text(said_L), known: known_L === undefined ? 'none' : text(known_L) },
+  };
 }
 
 function countText({ fields }: Reading): string {

@@ -3,10 +3,10 @@ import type { DoseAnswer } from '../../../core/dose/answer.ts';
 import { numberText, type DecimalMark } from '../../replies/number-text.ts';
 import { measureText } from '../../replies/quantity-text.ts';
 import type { Line } from '../../replies/reply.ts';
+import type { Here } from '../here.ts';
 import { mannerOf } from '../manner.ts';
 import type { Said } from '../next-memory.ts';
 import type { Note } from '../note.ts';
-import type { Settings } from '../settings.ts';
 import { additiveOf } from '../to-requests.ts';
 import { assumedLines } from './assumed.ts';
 import { redFigures } from './condition.ts';
@@ -27,7 +27,7 @@ export function roundFoot(
   said: readonly SaidInRound[],
   cautioned: ReadonlySet<string>,
   mark: DecimalMark,
-  settings: Settings,
+  here: Here,
 ): Line[] {
   const answered = said.filter(({ outcome }) => outcome.answer !== null);
   const holds = (intent: Said['reading']['intent']): boolean =>
@@ -38,7 +38,7 @@ export function roundFoot(
   const weighs = answered.some(({ reading }) => reading.intent === 'dose' || reading.intent === 'effect');
   const assumed = said
     .filter(({ reading }) => reading.problems.length === 0)
-    .flatMap(({ reading }) => assumedLines(reading, mannerOf(reading, mark, settings)));
+    .flatMap(({ reading }) => assumedLines(reading, mannerOf(reading, mark, here)));
   const weighed = answered.flatMap(
     ({ reading, outcome }) =>
       outcome.cautioned ?? (hasShortCautions(outcome.lines) ? (additiveOf(reading)?.id ?? []) : []),
@@ -46,8 +46,7 @@ export function roundFoot(
   return [
     ...(assumesStage ? [line('condition', 'condition-stage')] : []),
     ...stockLines(said, mark),
-    ...(holds('added') ? [line('condition', 'not-kept-addition'), line('effect', 'measure-tomorrow')] : []),
-    ...(holds('reading') ? [line('condition', 'not-kept-reading')] : []),
+    ...(holds('added') ? [line('effect', 'measure-tomorrow')] : []),
     ...(weighs ? [line('effect', 'round-effect')] : []),
     ...(said.some(({ reading }) => reading.problems.length > 0) ? [line('question', 'round-again')] : []),
     ...mergeLists(assumed),

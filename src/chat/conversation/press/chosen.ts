@@ -1,25 +1,23 @@
 import { dose } from '../../../core/dose/dose.ts';
 import type { Target } from '../../../core/wine.ts';
 import type { Reading } from '../../reader/understood.ts';
-import type { DecimalMark } from '../../replies/number-text.ts';
 import type { Line } from '../../replies/reply.ts';
+import type { Here } from '../here.ts';
 import { limitText } from '../lines/choice.ts';
 import { line } from '../lines/line.ts';
 import { vesselText } from '../lines/vessel.ts';
 import { mannerOf, molecularPerLitre } from '../manner.ts';
-import type { Settings } from '../settings.ts';
 import { toDoseRequest } from '../to-requests.ts';
 
 /** What was chosen: a target to reckon with, or lines where nothing is reckoned; undefined for no such choice. */
 export function chosen(
   reading: Reading,
   place: number,
-  mark: DecimalMark,
-  settings: Settings,
+  here: Here,
 ): { readonly target: Target } | { readonly lines: Line[] } | undefined {
-  const choice = dose(toDoseRequest(reading, settings.basis)).choices?.[place];
+  const choice = dose(toDoseRequest(reading, here.settings.basis)).choices?.[place];
   if (choice === undefined) return undefined;
-  const manner = mannerOf(reading, mark, settings);
+  const manner = mannerOf(reading, here.memory.decimalMark ?? '.', here);
   const vessel = vesselText(reading);
   if (choice.target === undefined) {
     const molecular = molecularPerLitre(choice.molecular_mg_L, manner);

@@ -5,7 +5,6 @@ import { solution } from '../../../core/dose/solution.ts';
 import type { Warning } from '../../../core/dose/answer.ts';
 import type { Step } from '../../../core/working.ts';
 import type { Reading } from '../../reader/understood.ts';
-import type { DecimalMark } from '../../replies/number-text.ts';
 import type { Button, Line } from '../../replies/reply.ts';
 import { buttonsFor, type LABELS } from '../buttons.ts';
 import { redFigures } from '../lines/condition.ts';
@@ -14,6 +13,7 @@ import { line } from '../lines/line.ts';
 import { vesselText } from '../lines/vessel.ts';
 import { allWarningLines } from '../lines/warnings.ts';
 import { wholeWorking } from '../lines/working.ts';
+import type { Here } from '../here.ts';
 import { mannerOf } from '../manner.ts';
 import type { Remembered } from '../memory.ts';
 import type { Settings } from '../settings.ts';
@@ -53,11 +53,11 @@ function reckonAgain(reading: Reading, settings: Settings): Reckoned {
 }
 
 /** The whole working of a remembered reading, line by line, with its sources. */
-export function workingOf(reading: Reading, mark: DecimalMark, settings: Settings): Line[] {
-  const { steps } = reckonAgain(reading, settings);
+export function workingOf(reading: Reading, here: Here): Line[] {
+  const { steps } = reckonAgain(reading, here.settings);
   return [
     line('first', 'working-head', { vessel: vesselText(reading) }),
-    ...wholeWorking(steps, mannerOf(reading, mark, settings)),
+    ...wholeWorking(steps, mannerOf(reading, here.memory.decimalMark ?? '.', here)),
   ];
 }
 
@@ -83,13 +83,10 @@ function buttonsBehind(reading: Reading, warned: readonly Warning[]): (keyof typ
 }
 
 /** All that stands behind `More`: every warning, and the buttons that had no room. */
-export function moreLines(
-  found: Remembered,
-  mark: DecimalMark,
-  settings: Settings,
-): { lines: Line[]; buttons: Button[] } {
+export function moreLines(found: Remembered, here: Here): { lines: Line[]; buttons: Button[] } {
+  const { settings, memory } = here;
   const { reading, ref } = found;
-  const manner = mannerOf(reading, mark, settings);
+  const manner = mannerOf(reading, memory.decimalMark ?? '.', here);
   const warned = reckonAgain(reading, settings).warnings;
   const warnings = allWarningLines(warned, manner);
   const head = line('first', 'more-head', { vessel: vesselText(reading) });

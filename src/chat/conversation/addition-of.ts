@@ -1,0 +1,32 @@
+import type { Addition } from '../../core/cellar/entry.ts';
+import type { AddedAnswer } from '../../core/dose/answer.ts';
+import type { Reading } from '../reader/understood.ts';
+import type { Here } from './here.ts';
+import { notedOf } from './to-be-weighed.ts';
+import { additiveOf } from './to-requests.ts';
+import { vesselsIn } from './vessels-named.ts';
+
+/** An addition as the log keeps it: what was said, what follows from it, what was planned, and the order it carries out. */
+export function additionOf(reading: Reading, answer: AddedAnswer, here: Here): Addition {
+  const vessels = vesselsIn(reading.fields);
+  const additive = additiveOf(reading);
+  const volume_L = reading.fields.volume_L ?? reading.assumed.volume_L;
+  const { steps: _steps, ...amount } = answer;
+  const plan = vessels.length === 1 ? here.plans.get(vessels[0] ?? '') : undefined;
+  const orders = vessels.length === 1 ? (here.vessels.get(vessels[0] ?? '')?.orders ?? []) : [];
+  const [order] = orders;
+  const isOrdered = order !== undefined && orders.length === 1 && order.additive === additive?.id;
+  const { chemical_lot, remark } = reading;
+  return {
+    kind: 'addition',
+    vessels,
+    ...(additive && notedOf(additive)),
+    ...amount,
+    ...(volume_L !== undefined && { volume_L }),
+    ...(plan && { planned_mg_L: plan.planned_mg_L }),
+    ...(plan?.planned_free_mg_L !== undefined && { planned_free_mg_L: plan.planned_free_mg_L }),
+    ...(isOrdered && { order: order.entry }),
+    ...(chemical_lot !== undefined && { chemical_lot }),
+    ...(remark !== undefined && { remark }),
+  };
+}

@@ -1,0 +1,74 @@
+import type { CellarView } from '../../../../core/cellar/cellar-store.ts';
+import type { Reading } from '../../../reader/understood.ts';
+import { withVessels, type Here } from '../../here.ts';
+import { line } from '../../lines/line.ts';
+import type { Handled } from '../../ports.ts';
+import { replying } from '../../replying.ts';
+import { daySheet, historySheet } from './sheets.ts';
+import { forgetPerson } from './forget-person.ts';
+import { listVessels, listDue, listOrders } from './lists.ts';
+import { setSetting, settingWrong, showSettings } from './settings.ts';
+import { strikeEntry, undoEntry } from './undo.ts';
+import { takeAway } from './take-away.ts';
+import { vesselSheet } from './vessel-sheet.ts';
+
+/**
+ * One of the bot's own words: it looks the answer up. Undefined for statements about vessels and for orders, which are
+ * answered like any other reading.
+ */
+export async function answerCommand(
+  { command, fields }: Reading,
+  here: Here,
+  view: CellarView,
+): Promise<Handled | undefined> {
+  switch (command?.name) {
+    case 'vessel':
+      return vesselSheet(fields.vessel, here);
+    case 'vessels':
+      return listVessels(here, view);
+    case 'due':
+      return listDue(here, view);
+    case 'open':
+      return listOrders(here, view);
+    case 'day':
+      return daySheet(command.day, here, view);
+    case 'history':
+      return historySheet(fields.vessel, here, view);
+    case 'undo':
+      return undoEntry(await view.lastEntryBy(here.me), here);
+    case 'strike': {
+      const entry = await view.entry(command.entry);
+      const near = entry ? await withVessels(here, view, entry.vessels) : here;
+      return strikeEntry(entry, command.reason, near, String(command.entry));
+    }
+    case 'settings':
+      return showSettings(here);
+    case 'set':
+      return setSetting(command.setting, here, view);
+    case 'set-wrong':
+      return settingWrong(command.of, command.about, here);
+    case 'export':
+    case 'import':
+    case 'backup':
+      return takeAway(command, fields.vessel, here);
+    case 'forget-me':
+      return forgetPerson(here, view);
+    case 'order':
+    case 'later':
+    case 'unwatch':
+    case 'watch':
+    case 'forget':
+    case 'told':
+    case 'capacity':
+    case 'racked':
+    case 'topped':
+    case 'acid':
+    case 'moved':
+    case 'blended':
+    case 'emptied':
+    case 'lot':
+      return undefined;
+    case undefined:
+      return replying(here, { lines: [line('first', 'not-served')] });
+  }
+}

@@ -1,0 +1,79 @@
+import type { Entry, LoggedEntry, VesselChange } from '../../../core/cellar/entry.ts';
+import { numberText, type DecimalMark } from '../../replies/number-text.ts';
+import { concentrationText } from '../../replies/quantity-text.ts';
+import type { Line } from '../../replies/reply.ts';
+import { vesselName, vesselNames } from '../../replies/vessel-name.ts';
+import { volumeText } from '../../replies/volume-text.ts';
+import type { Here } from '../here.ts';
+import { part } from './line.ts';
+import { notedAmount } from './noted-amount.ts';
+
+type Part = Omit<Line, 'room'>;
+
+/** What an entry holds, as one part of a line: vessel, what, how much. */
+export function entryPart(entry: LoggedEntry, { settings, memory }: Pick<Here, 'settings' | 'memory'>): Part {
+  const mark = memory.decimalMark ?? '.';
+  const vessel = vesselNames(entry.vessels);
+  switch (entry.kind) {
+    case 'addition':
+    case 'order': {
+      const amount = notedAmount(entry, mark);
+      const { added_mg_L } = entry;
+      const added = added_mg_L === undefined ? 'none' : concentrationText(added_mg_L, mark);
+      const values = { vessel, added, known: amount ? 'some' : 'none' };
+      return { ...part(`entry-${entry.kind}`, values), list: amount ? [amount] : [] };
+    }
+    case 'reading':
+      return { ...part('entry-reading', { vessel }), list: measuredParts(entry, mark) };
+    case 'vessel':
+      return {
+        ...part('entry-vessel', { vessel, ...eventValues(entry) }),
+        list: toldParts(entry, settings.volumeUnit, mark),
+      };
+    case 'other':
+      return part('entry-other', { vessel, text: entry.remark });
+    case 'stock':
+      return part('entry-stock', { text: entry.remark ?? '' });
+    case 'correction':
+      return part('entry-correction', { entry: String(entry.corrects), reason: entry.reason });
+  }
+}
+
+function measuredParts(entry: Extract<Entry, { kind: 'reading' }>, mark: DecimalMark): Part[] {
+  const said = (value: number): string => numberText(value, 2, mark);
+  const { free_mg_L, total_mg_L, ph, temperature_C } = entry;
+  return [
+    ...(free_mg_L === undefined ? [] : [part('fact-free', { free: said(free_mg_L) })]),
+    ...(total_mg_L === undefined ? [] : [part('fact-total', { total: said(total_mg_L) })]),
+    ...(ph === undefined ? [] : [part('fact-ph', { ph: said(ph) })]),
+    ...(temperature_C === undefined ? [] : [part('fact-temperature', { celsius: said(temperature_C) })]),
+  ];
+}
+
+function eventValues({ event, to, lot, volume_L }: VesselChange): Record<string, string> {
+  return {
+    event,
+    to: to === undefined ? 'none' : vesselName(to),
+    lot: lot ?? '',
+    whole: volume_L === undefined ? 'all' : 'part',
+  };
+}
+
+/** What was told of a vessel; of what was moved its volume. */
+function toldParts(entry: VesselChange, unit: Here['settings']['volumeUnit'], mark: DecimalMark): Part[] {
+  const { style, category, product, organic, stage, alcohol_percent, volume_L, capacity_L } = entry;
+  return [
+    ...(volume_L === undefined ? [] : [part('fact-volume', { volume: volumeText(volume_L, unit, mark) })]),
+    ...(capacity_L === undefined
+      ? []
+      : [part('fact-capacity', { volume: volumeText(capacity_L, unit, mark) })]),
+    ...(style === undefined ? [] : [part('fact-style', { style })]),
+    ...(category === undefined ? [] : [part('fact-category', { category })]),
+    ...(product === undefined ? [] : [part('fact-product', { product })]),
+    ...(organic === true ? [part('fact-organic')] : []),
+    ...(stage === undefined ? [] : [part('fact-stage', { stage })]),
+    ...(alcohol_percent === undefined
+      ? []
+      : [part('fact-alcohol', { percent: numberText(alcohol_percent, 2, mark) })]),
+  ];
+}
