@@ -9,9 +9,9 @@ export const FILE_LIMITS = {
   /** Letters of one cell; a remark is a message at most. */
   letters: 8192,
   /** Bytes that the parts of a spreadsheet may unpack to. */
-  unpacked_bytes: 48 * 1024 * 1024,
+  unpacked_bytes: 24 * 1024 * 1024,
   /** How long reading may take, in milliseconds. */
   time_ms: 20_000,
   /** Memory of reading, in MB. */
-  memory_MB: 384,
+  memory_MB: 256,
 } as const;

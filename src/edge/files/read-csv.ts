@@ -15,8 +15,8 @@ export function readCsv(text: string): Table {
       record_delimiter: ['\r\n', '\n', '\r'],
       relax_column_count: true,
       relax_quotes: true,
-      // One more than may be, so that too many are noticed.
-      to: FILE_LIMITS.rows + 2,
+      // More than may be, so that too many are noticed.
+      to: FILE_LIMITS.rows + 3,
       max_record_size: FILE_LIMITS.columns * FILE_LIMITS.letters,
     });
   } catch (cause) {

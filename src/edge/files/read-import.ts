@@ -3,6 +3,10 @@ import { nothingRead } from '../../chat/attachments/import-read.ts';
 import type { ListReading } from '../../chat/attachments/read-vessels.ts';
 import { FILE_LIMITS } from './file-limits.ts';
 import { ThreadFault, runInThread } from './run-in-thread.ts';
+import { makeTakeTurns } from '../store/take-turns.ts';
+
+/** One file is read at a time, so that many at once need no more memory than one. */
+const takeTurns = makeTakeTurns();
 
 /**
  * Reads a file that somebody sent: our own export as CSV or XLSX, or a list of vessels. It is read in a thread of its
@@ -17,7 +21,7 @@ export async function readImport(bytes: Uint8Array, reading: ListReading): Promi
     memory_MB: FILE_LIMITS.memory_MB,
   };
   try {
-    return await runInThread<ImportRead>(work, { bytes, reading });
+    return await takeTurns('import', () => runInThread<ImportRead>(work, { bytes, reading }));
   } catch (fault) {
     if (!(fault instanceof ThreadFault)) throw fault;
     return nothingRead(fault.reason === 'failed' ? 'broken' : 'too-heavy');

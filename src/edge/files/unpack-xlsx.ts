@@ -4,14 +4,18 @@ import { FILE_LIMITS } from './file-limits.ts';
 
 const WANTED = /^(?:\[Content_Types\]\.xml|_rels\/[^/]+|xl\/(?!media\/).+\.(?:xml|rels))$/;
 
+/** The sheets of a spreadsheet, the texts of all its cells, and the whole as a zip in which nothing is packed. */
+export interface UnpackedXlsx {
+  readonly sheets: readonly Uint8Array[];
+  readonly texts: Uint8Array;
+  readonly plain: Uint8Array;
+}
+
 /**
  * The parts of a spreadsheet, unpacked into what they say they need and no more, and laid together again as they are:
  * so the library that reads them meets no zip but ours. Throws a `FileFault` for what unpacks to too much.
  */
-export function unpackXlsx(bytes: Uint8Array): {
-  readonly sheets: readonly Uint8Array[];
-  readonly plain: Uint8Array;
-} {
+export function unpackXlsx(bytes: Uint8Array): UnpackedXlsx {
   let unpacked_bytes = 0;
   const parts = unzip(bytes, (name, size) => {
     if (!WANTED.test(name)) return false;
@@ -21,7 +25,8 @@ export function unpackXlsx(bytes: Uint8Array): {
   });
   if (parts['xl/workbook.xml'] === undefined) throw new FileFault('not-a-table');
   const sheets = Object.entries(parts).filter(([name]) => name.startsWith('xl/worksheets/'));
-  return { sheets: sheets.map(([, part]) => part), plain: zipSync(parts, { level: 0 }) };
+  const texts = parts['xl/sharedStrings.xml'] ?? new Uint8Array();
+  return { sheets: sheets.map(([, part]) => part), texts, plain: zipSync(parts, { level: 0 }) };
 }
 
 function unzip(
