@@ -1,14 +1,29 @@
+import type { CellarStore } from '../../src/core/cellar/cellar-store.ts';
 import { handle } from '../../src/chat/conversation/conversation.ts';
 import type { Content, IncomingMessage } from '../../src/chat/conversation/ports.ts';
-import { DEFAULT_SETTINGS } from '../../src/chat/conversation/settings.ts';
+import { DEFAULT_SETTINGS, type Settings } from '../../src/chat/conversation/settings.ts';
 import { makeSay, type Said } from '../../src/chat/replies/say.ts';
 import { loadLocales } from '../../src/edge/locales.ts';
 import { isLanguage } from '../../src/edge/languages.ts';
-import { createMemoryStore } from '../../src/edge/store/memory.ts';
+import { makeServe, type Serve } from '../../src/edge/serve-message.ts';
+import { createMemoryCellars } from '../../src/edge/store/memory-cellars.ts';
+
+const MOVES = [
+  'them',
+  'press',
+  'sends',
+  'later',
+  'language',
+  'person',
+  'name',
+  'chat',
+  'tick',
+  'restart',
+] as const;
 
 /** One step of a scene: what somebody does, and the lines that come back. */
 export interface Move {
-  readonly does: 'them' | 'press' | 'sends' | 'later' | 'language' | 'person';
+  readonly does: (typeof MOVES)[number];
   readonly what: string;
   readonly us: readonly string[];
 }
@@ -19,12 +34,15 @@ export interface Scene {
   readonly moves: readonly Move[];
 }
 
-const LINE = /^(them|press|sends|later|language|person|us): ?(.*)$/;
+const LINE = new RegExp(`^(${MOVES.join('|')}|us):(?: (.*))?$`);
 
 /**
  * Reads a scene. `them:` is what a person writes (lines that follow each other are one message), `us:` what we answer,
- * `press:` a button by its label, `sends:` what cannot be read, `later:` minutes that pass, `language:` and `person:`
- * who is there from now on. In an answer `…` stands for any lines, and a line in square brackets for the buttons.
+ * `press:` a button by its label, `sends:` what cannot be read. `later:` lets minutes pass (`3 h` hours, `2 d` days),
+ * `person:` or `name:` and `language:` say who is there from now on, `chat:` in which chat of the cellar. `tick:` is the
+ * moment at which what is due is said, `restart:` begins the program anew with the same store. In an answer `…` stands
+ * for any lines, and a line in square brackets for the buttons; a line in round brackets names another chat than the
+ * present one, in which what follows is said.
  */
 export function readScene(text: string): Scene {
   const [first = '', ...rest] = text.split('\n');
@@ -53,32 +71,85 @@ const START = Date.parse('2026-10-05T08:00:00Z');
 
 const say = makeSay(loadLocales());
 
+const MINUTES_A = { '': 1, min: 1, h: 60, d: 24 * 60 } as const;
+
+/** Milliseconds of a time as a scene has it: `20` and `20 min` are minutes, `3 h` hours, `2 d` days. */
+function readTime(text: string): number {
+  const match = /^(\d+) ?(|min|h|d)$/.exec(text.trim());
+  if (!match) throw new SyntaxError(`Cannot read the time of a scene "${text}"`);
+  return Number(match[1]) * MINUTES_A[match[2] as keyof typeof MINUTES_A] * 60_000;
+}
+
+/** Something that is said unasked, and in which chat. */
+export interface SaidUnasked {
+  readonly chat: string;
+  readonly said: Said;
+}
+
+/** What a scene can be played with. */
+export interface Playing {
+  readonly settings?: Settings;
+  /** Says what is due at a moment, for the `tick:` of a scene. */
+  readonly tick?: (store: CellarStore, now: number) => Promise<readonly SaidUnasked[]>;
+}
+
 /** Plays a scene with a store in memory; gives what we answered to each move. */
-export async function play({ moves }: Scene): Promise<string[][]> {
-  const state = createMemoryStore();
+export async function play(
+  { moves }: Scene,
+  { settings = DEFAULT_SETTINGS, tick = async () => [] }: Playing = {},
+): Promise<string[][]> {
   let at = START;
+  const store = createMemoryCellars({ now: () => at });
+  let serve = serving(store, settings);
   let language: IncomingMessage['language'] = 'en';
   let person = 'Ana';
-  let shown: Said[] = [];
+  let chat = 'one';
+  /** What stands on the screen of each chat. */
+  const shown = new Map<string, readonly Said[]>();
+  const show = (where: string, said: readonly Said[]): void => {
+    if (said.some(({ buttons }) => buttons.length > 0)) shown.set(where, said);
+  };
   const answers: string[][] = [];
   for (const [count, { does, what }] of moves.entries()) {
-    if (does === 'later') at += Number.parseInt(what) * 60_000;
+    if (does === 'later') at += readTime(what);
     if (does === 'language' && isLanguage(what)) language = what;
-    if (does === 'person') person = what;
-    const content = contentOf(does, what, shown);
+    if (does === 'person' || does === 'name') person = what;
+    if (does === 'chat') chat = what;
+    if (does === 'restart') serve = serving(store, settings);
+    if (does === 'tick') {
+      const sent = await tick(store, at);
+      for (const one of sent) show(one.chat, [one.said]);
+      answers.push(unaskedLines(sent, chat));
+      continue;
+    }
+    const content = contentOf(does, what, shown.get(chat) ?? []);
     if (content === undefined) {
       answers.push([]);
       continue;
     }
-    const who = { cellar: 'harbour cellar', chat: 'one', person };
-    const message: IncomingMessage = { ...who, id: String(count), at, language, content };
-    const { writes, replies } = handle(message, await state.load(message), DEFAULT_SETTINGS);
-    await state.commit(writes);
-    const said = replies.map(say);
-    if (said.some(({ buttons }) => buttons.length > 0)) shown = said;
+    const who = { cellar: 'harbour cellar', chat, person, name: person };
+    const { said } = await serve({ ...who, id: String(count), at, language, content });
+    show(chat, said);
     answers.push(said.flatMap(linesOf));
   }
   return answers;
+}
+
+/** Begins the program: nothing but the store is left from before. A fault of ours ends the scene. */
+function serving(store: CellarStore, settings: Settings): Serve {
+  const report = (fault: unknown): never => {
+    throw fault;
+  };
+  return makeServe({ handle, say, store, settings, report });
+}
+
+function unaskedLines(sent: readonly SaidUnasked[], present: string): string[] {
+  let chat = present;
+  return sent.flatMap((one) => {
+    const head = one.chat === chat ? [] : [`(${one.chat})`];
+    ({ chat } = one);
+    return [...head, ...linesOf(one.said)];
+  });
 }
 
 function contentOf(does: Move['does'], what: string, shown: readonly Said[]): Content | undefined {
