@@ -51,9 +51,9 @@ export async function runReminders(options: RemindersOptions): Promise<void> {
       const taken = most > 0 ? await store.takeDue(now, { lease_ms: LEASE_MS, most }) : [];
       if (signal.aborted) break;
       for (const due of taken) if (!busy.has(keyOf(due))) start(due, now);
-      failures = 0;
       if (taken.length > 0) continue;
       const next = (await store.nextDue()) ?? Infinity;
+      failures = 0;
       // Where nothing is handed out although it is due, it will not be in the same instant either.
       const wait_ms = next > clock.now() ? next - clock.now() : NOT_HANDED_OUT_MS;
       await wakeUp.wait(Math.min(wait_ms, longest_wait_ms), { clock, signal });

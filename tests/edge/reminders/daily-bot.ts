@@ -5,8 +5,8 @@ import { nextDaily, type DailyHours } from '../../../src/core/time/next-daily.ts
 import { runReminders } from '../../../src/edge/reminders/run-reminders.ts';
 import { createWakeUp } from '../../../src/edge/reminders/wake-up.ts';
 import { wakingTurn } from '../../../src/edge/reminders/waking-turn.ts';
+import { createMemoryCellars } from '../../../src/edge/store/memory-cellars.ts';
 import type { FlyingClock } from './flying-clock.ts';
-import { createSmallCellar } from './small-cellar.ts';
 
 /** A bot that sends one chat its daily list, and can be stopped, killed and started again on the same store. */
 export interface DailyBot {
@@ -30,7 +30,7 @@ export async function createDailyBot(
     longest_wait_ms,
   }: { readonly hours: DailyHours; readonly fails?: () => boolean; readonly longest_wait_ms?: number },
 ): Promise<DailyBot> {
-  const store = createSmallCellar();
+  const store = createMemoryCellars({ now: clock.now });
   const sent: string[] = [];
   const daily = (at: number): Write => {
     const id = `daily ${isoWithZone(at, hours.zone).slice(0, 10)}`;

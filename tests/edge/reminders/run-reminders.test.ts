@@ -1,48 +1,12 @@
 import { expect, test } from 'vitest';
-import type { TakenDue } from '../../../src/core/cellar/cellar-store.ts';
 import { reminderAt } from '../../../src/core/cellar/reminder-at.ts';
 import { runReminders } from '../../../src/edge/reminders/run-reminders.ts';
 import { createWakeUp } from '../../../src/edge/reminders/wake-up.ts';
-import { wakingTurn } from '../../../src/edge/reminders/waking-turn.ts';
+import { createMemoryCellars } from '../../../src/edge/store/memory-cellars.ts';
 import { createFlyingClock } from './flying-clock.ts';
-import { createSmallCellar, type SmallCellar } from './small-cellar.ts';
+import { reminding, START } from './reminding.ts';
 
-const START = Date.parse('2026-11-12T08:00Z');
 const MINUTE = 60_000;
-
-/** Reminding under way: `said` holds what was said, with the seconds after the start. */
-function reminding(
-  says: (due: TakenDue) => Promise<void> | void = () => {},
-  around: (store: SmallCellar) => Partial<SmallCellar> = () => ({}),
-) {
-  const clock = createFlyingClock(START);
-  const cellar = createSmallCellar();
-  const wakeUp = createWakeUp();
-  const turn = wakingTurn(cellar, wakeUp);
-  const tries: string[] = [];
-  const said: string[] = [];
-  const logged: string[] = [];
-  const seconds = (): number => (clock.now() - START) / 1000;
-  const note = (data: { err?: unknown }, sentence: string): void =>
-    void logged.push(`${sentence}: ${String((data.err as Error | undefined)?.message)}`);
-  const say = async (due: TakenDue): Promise<void> => {
-    tries.push(`${due.id} ${seconds()}`);
-    await says(due);
-    await turn(due.cellar, async () => ({ writes: [{ kind: 'said', id: due.id }], result: undefined }));
-    said.push(`${due.id} ${seconds()}`);
-  };
-  const controller = new AbortController();
-  const log = { error: note, warn: note } as unknown as Parameters<typeof runReminders>[0]['log'];
-  const store = { ...cellar, ...around(cellar) };
-  const running = runReminders({ store, say, clock, log, wakeUp, signal: controller.signal });
-  const plan = (id: string, after_s: number): Promise<void> =>
-    turn('c', async () => ({
-      writes: [{ kind: 'due', due: { id, chat: 'one', at: START + 1000 * after_s, about: '{}' } }],
-      result: undefined,
-    }));
-  const fly = (to_s: number): Promise<void> => clock.flyTo(START + 1000 * to_s);
-  return { clock, turn, plan, fly, tries, said, logged, running, stop: () => controller.abort() };
-}
 
 test('what falls due is said at its time, also what is written while everybody waits', async () => {
   const bot = reminding();
@@ -65,10 +29,7 @@ test('what was due while nobody ran is said at once, and many things in the orde
 test('a reminder that was asked for in the evening comes the next evening, in quiet hours', async () => {
   const bot = reminding();
   const added = START + 13 * 60 * MINUTE; // 22:00 in Madrid
-  await bot.turn('c', async () => ({
-    writes: [{ kind: 'due', due: { id: 'r', chat: 'one', at: reminderAt(added), about: '{}' } }],
-    result: undefined,
-  }));
+  await bot.plan('r', (reminderAt(added) - START) / 1000);
   await bot.fly(40 * 3600);
   expect(bot.said).toEqual([`r ${37 * 3600}`]);
 });
@@ -184,7 +145,7 @@ test('a stop that comes while the store is asked leaves what it hands out to its
 test('what throws before it waits for anything is tried again like everything else', async () => {
   let left = 1;
   const clock = createFlyingClock(START);
-  const store = createSmallCellar();
+  const store = createMemoryCellars({ now: clock.now });
   const due = { id: 'a', chat: 'one', at: START, about: '{}' };
   await store.turn('c', async () => ({ writes: [{ kind: 'due', due }], result: undefined }));
   const said: number[] = [];
