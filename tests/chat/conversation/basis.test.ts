@@ -13,16 +13,16 @@ test.each([
   ['100 g kmbs in 20 hl pH 3.5 free 10 13% 22C', 'By the OIV table for 13 %, 22 °C (pK 2.055).'],
   ['T4 40 hl pH 3.5 free 10', 'By OIV at 12 %, 20 °C it would be about 11 mg/L less.'],
   ['T4 40 hl pH 3.5 free 10 13% 14C', 'By OIV at 13 %, 20 °C it would be about 12 mg/L less.'],
-])('with the OIV basis it is said what it rests on, or would: %s', (message, said) => {
-  expect(textOf(startTalk(OIV).write(message))).toContain(said);
+])('with the OIV basis it is said what it rests on, or would: %s', async (message, said) => {
+  expect(textOf(await startTalk(OIV).write(message))).toContain(said);
 });
 
-test('with the usual constant no table is spoken of', () => {
-  expect(textOf(startTalk().write('T4 40 hl pH 3.5 free 10 13% 22C'))).not.toContain('OIV');
+test('with the usual constant no table is spoken of', async () => {
+  expect(textOf(await startTalk().write('T4 40 hl pH 3.5 free 10 13% 22C'))).not.toContain('OIV');
 });
 
-test('a vessel of a round has what may forbid its addition right under its line', () => {
-  const text = textOf(startTalk().write('T1 40 hl pH 3.4 free 10\nT2 40 hl pH 3.4 free 10 total 140'));
+test('a vessel of a round has what may forbid its addition right under its line', async () => {
+  const text = textOf(await startTalk().write('T1 40 hl pH 3.4 free 10\nT2 40 hl pH 3.4 free 10 total 140'));
   const lines = text.split('\n');
   const at = lines.findIndex((line) => line.startsWith('T2'));
   expect(lines[at + 1]).toMatch(/^⚠ That would make total 162, over 150/);

@@ -19,11 +19,11 @@ const SCENES: readonly (readonly [key: string, ...messages: string[]])[] = [
   ['ask-ph', 'T4 40 hl free 20'],
   ['ask-free_mg_L', 'T4 40 hl pH 3.5'],
   ['ask-target', 'port 20 hl pH 3.6 free 12'],
-  ['ask-target', 'T4 40 hl white, ML done, pH 3.4 free 15', 'press t:1'],
+  ['ask-target', 'T4 40 hl white, ML done, pH 3.4 free 15', 'press t:1.1'],
   ['ask-target-stage', 'T5 40 hl must'],
   ['ask-target-stage', 'B1-B3 must 225 L'],
   ['ask-target-stage', 'T9 base wine 1450 gal'],
-  ['ask-target-stage', 'T5 40 hl must add 40 ppm', 'press t:1'],
+  ['ask-target-stage', 'T5 40 hl must add 40 ppm', 'press t:1.1'],
   ['ask-strength_percent', 'kmbs solution 40 hl add 25 ppm'],
   ['ask-strength_percent', 'SO2 water 40 hl add 25 ppm'],
   ['ask-strength_percent', 'khso3 40 hl add 25 ppm'],
@@ -85,35 +85,44 @@ function examplesIn(text: string): string[] {
 }
 
 /** Plays messages, and then each example in a talk of its own. */
-function sendEach(messages: readonly string[]): [example: string, handled: Handled][] {
-  const talkAfter = (): { talk: Talk; said: string } => {
+async function sendEach(
+  messages: readonly string[],
+): Promise<{ readonly example: string; readonly handled: Handled }[]> {
+  const talkAfter = async (): Promise<{ talk: Talk; said: string }> => {
     const talk = startTalk();
-    const handled = messages.map((one) =>
-      one.startsWith('press ') ? talk.press(one.slice(6)) : talk.write(one),
-    );
-    return { talk, said: handled.slice(-1).map(textOf).join('') };
+    let said = '';
+    for (const one of messages)
+      said = textOf(one.startsWith('press ') ? await talk.press(one.slice(6)) : await talk.write(one));
+    return { talk, said };
   };
-  return examplesIn(talkAfter().said).map((example) => {
+  const sent: { example: string; handled: Handled }[] = [];
+  for (const example of examplesIn((await talkAfter()).said)) {
     // Where the figure is the person's own to say, they say one.
-    const { talk } = talkAfter();
-    return [example, talk.write(example.replace('add …', 'add 30').replace('… L', '900 L'))];
-  });
+    const { talk } = await talkAfter();
+    const text = example.replace('add …', 'add 30').replace('… L', '900 L');
+    sent.push({ example, handled: await talk.write(text) });
+  }
+  return sent;
 }
 
 describe('every example that a reply suggests works when it is sent as it stands', () => {
-  test.each(SCENES.map(([key, ...messages]) => ({ key, messages })))('$key: $messages', ({ messages }) => {
-    const sent = sendEach(messages);
-    expect(sent.length).toBeGreaterThan(0);
-    for (const [example, { understood, answers }] of sent) {
-      const [reading] = understood?.readings ?? [];
-      expect([example, reading?.problems]).toEqual([example, []]);
-      const isUsed =
-        (answers?.[0] ?? undefined) !== undefined ||
-        reading?.intent === 'added' ||
-        (reading?.asks.length ?? 9) < 3;
-      expect([example, isUsed, reading?.intent !== 'chat']).toEqual([example, true, true]);
-    }
-  });
+  test.each(SCENES.map(([key, ...messages]) => ({ key, messages })))(
+    '$key: $messages',
+    async ({ messages }) => {
+      const sent = await sendEach(messages);
+      expect(sent.length).toBeGreaterThan(0);
+      for (const { example, handled } of sent) {
+        const { understood, answers } = handled;
+        const [reading] = understood?.readings ?? [];
+        expect([example, reading?.problems]).toEqual([example, []]);
+        const isUsed =
+          (answers?.[0] ?? undefined) !== undefined ||
+          reading?.intent === 'added' ||
+          (reading?.asks.length ?? 9) < 3;
+        expect([example, isUsed, reading?.intent !== 'chat']).toEqual([example, true, true]);
+      }
+    },
+  );
 
   test('no sentence with an example is missing here', () => {
     const english = readFileSync('locales/en.ftl', 'utf8');
@@ -128,11 +137,11 @@ describe('every example that a reply suggests works when it is sent as it stands
   });
 });
 
-test.each(WHOLE_LINES)('%s: the figure written plainly in the whole line', (message, ...whole) => {
+test.each(WHOLE_LINES)('%s: the figure written plainly in the whole line', async (message, ...whole) => {
   const talk = startTalk();
-  expect(textOf(talk.write(message))).toContain('Send the whole line again.');
+  expect(textOf(await talk.write(message))).toContain('Send the whole line again.');
   for (const one of whole) {
-    const { understood } = startTalk().write(one);
+    const { understood } = await startTalk().write(one);
     expect([one, understood?.readings[0]?.problems]).toEqual([one, []]);
   }
 });

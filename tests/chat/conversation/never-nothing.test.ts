@@ -1,6 +1,8 @@
 import fc from 'fast-check';
 import { expect, test } from 'vitest';
 import { answerReading } from '../../../src/chat/conversation/answer-reading.ts';
+import { NO_FACTS, type Here } from '../../../src/chat/conversation/here.ts';
+import { FRESH_MEMORY } from '../../../src/chat/conversation/memory.ts';
 import { mannerOf } from '../../../src/chat/conversation/manner.ts';
 import { DEFAULT_SETTINGS } from '../../../src/chat/conversation/settings.ts';
 import { ASKED_FIELDS } from '../../../src/chat/reader/understood.ts';
@@ -73,10 +75,34 @@ const anyReading: fc.Arbitrary<Reading> = fc
     where: {},
   }));
 
+const AT = Date.UTC(2026, 9, 5, 8);
+
+/** A cellar in which nothing was ever said. */
+const HERE: Here = {
+  ...NO_FACTS,
+  message: {
+    cellar: 'harbour cellar',
+    chat: 'one',
+    person: 'Ana',
+    id: '1',
+    at: AT,
+    language: 'en',
+    content: { kind: 'text', text: '' },
+  },
+  memory: FRESH_MEMORY,
+  settings: DEFAULT_SETTINGS,
+  me: 1,
+  isNewPerson: true,
+  nextEntry: 1,
+  isZoneAsked: false,
+  done: new Set(),
+};
+
 test('no reading of any intent gets a reply without an answer, a question, a problem or a line of talk', () => {
   const check = (reading: Reading): void => {
-    const manner = mannerOf(reading, '.', DEFAULT_SETTINGS);
-    const turn = { settings: DEFAULT_SETTINGS, manner, number: 1, cautioned: new Set<string>() };
+    const manner = mannerOf(reading, '.', HERE);
+    const cautioned = new Set<string>();
+    const turn = { settings: DEFAULT_SETTINGS, manner, ref: '1.1', here: HERE, cautioned };
     const { lines, inRound, buttons } = answerReading(reading, 'en', turn);
     const told = lines.filter(({ room }) => ['first', 'question', 'effect'].includes(room));
     expect(told.length).toBeGreaterThan(0);

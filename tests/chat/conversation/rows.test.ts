@@ -34,8 +34,8 @@ const MESSAGES = [
 ];
 
 describe.each(MESSAGES)('%s', (message) => {
-  test(`fits ${MOST_ROWS} rows of ${PHONE_COLUMNS} letters, cautions in full included`, () => {
-    expect(rowsOf(textOf(startTalk().write(message)), PHONE_COLUMNS)).toBeLessThanOrEqual(MOST_ROWS);
+  test(`fits ${MOST_ROWS} rows of ${PHONE_COLUMNS} letters, cautions in full included`, async () => {
+    expect(rowsOf(textOf(await startTalk().write(message)), PHONE_COLUMNS)).toBeLessThanOrEqual(MOST_ROWS);
   });
 });
 
@@ -44,10 +44,10 @@ test.each([
   'T4 40 hl pH 3.4 free 15',
   'white 12 hl 3.21 28',
   '100 g kmbs in 20 hl',
-])('a typical reply takes at most 16 rows once the cautions were said today: %s', (message) => {
+])('a typical reply takes at most 16 rows once the cautions were said today: %s', async (message) => {
   const talk = startTalk();
-  talk.write(message);
-  expect(rowsOf(textOf(talk.write(message)), PHONE_COLUMNS)).toBeLessThanOrEqual(16);
+  await talk.write(message);
+  expect(rowsOf(textOf(await talk.write(message)), PHONE_COLUMNS)).toBeLessThanOrEqual(16);
 });
 
 test.each(Object.values(ADDITIVES).map(({ id }) => id))(
@@ -66,15 +66,15 @@ test.each(Object.values(ADDITIVES).map(({ id }) => id))(
   },
 );
 
-test('help explains itself with three examples in twelve rows', () => {
-  const help = textOf(startTalk().write('?'));
+test('help explains itself with three examples in twelve rows', async () => {
+  const help = textOf(await startTalk().write('?'));
   expect(rowsOf(help, PHONE_COLUMNS)).toBeLessThanOrEqual(12);
   const examples = help
     .split('\n')
     .flatMap((_, at, all) => (all[at + 1]?.startsWith('→') ? [all[at] ?? ''] : []));
   expect(examples).toHaveLength(3);
   for (const example of examples) {
-    const { understood, answers } = startTalk().write(example);
+    const { understood, answers } = await startTalk().write(example);
     expect(understood?.readings.map(({ problems, asks }) => [problems, asks])).toEqual([[[], []]]);
     expect(answers?.[0]).not.toBeNull();
   }
