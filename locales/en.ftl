@@ -127,9 +127,9 @@ choice-to =
 choice-no-amount = – To { $free } ({ $molecular } molecular): no amount: total would pass { $limit } (international code).
 choice-red =
     { $kind ->
-        [none] If it is red, 0.6 takes { $free } free: nothing to add.
-        [over] If it is red, 0.6 takes { $free } free: no amount, total would pass { $limit } (international code).
-       *[other] If it is red, 0.6 takes { $free } free: { bare-amount }.
+        [none] If it is red, { $red } takes { $free } free: nothing to add.
+        [over] If it is red, { $red } takes { $free } free: no amount, total would pass { $limit } (international code).
+       *[other] If it is red, { $red } takes { $free } free: { bare-amount }.
     }
 ways-out = Or: colder, cleaner, checked more often; acid for a lower pH: ask someone qualified.
 
@@ -138,9 +138,9 @@ ways-out = Or: colder, cleaner, checked more often; acid for a lower pH: ask som
 condition-stage = Only if malolactic is finished or not wanted.
 condition-red =
     { $kind ->
-        [none] If it is red (0.6 molecular): nothing to add.
-        [over] If red (0.6 molecular): { bare-amount }, also over { $limit }.
-       *[other] If it is red (0.6 molecular): { bare-amount }.
+        [none] If it is red ({ $red } molecular): nothing to add.
+        [over] If red ({ $red } molecular): { bare-amount }, also over { $limit }.
+       *[other] If it is red ({ $red } molecular): { bare-amount }.
     }
 no-dose-fermenting = { at }no sulfite now, it is still fermenting.
 no-dose-malolactic = { at }no sulfite now, malolactic is still to come.
@@ -608,7 +608,8 @@ round-strength =
        *[other] , { $size } %
     }
 round-for-all = For all: { $list }.
-round-red = “If red” is for 0.6 molecular.
+round-kept = The readings are kept.
+round-red = “If red” is for { $red } molecular.
 round-stock = As a { $strength } % stock of it: { $list }.
 round-rest = The rest as a { $strength } % stock: { $list }.
 round-stock-of = { $vessel } { $amount }
@@ -658,7 +659,6 @@ button-choice-to = To { $free }
 ## What the cellar remembers
 
 fault-unwritten = Not noted: I could not write it down. Please send it again in a minute.
-vessel-new = { $vessel } is new to me: kept from now on.
 vessel-unknown =
     { $vessel ->
         [none] Which vessel? Like: T4?
@@ -673,6 +673,12 @@ ask-volume-which =
         [none] { $said } is more than it holds. Is that right?
        *[other] you wrote { $said }, I had { $known }. Which is it?
     }
+read-kept =
+    { $new ->
+        [new] Kept, { $vessel } is new to me: { $list }.
+       *[known] Read and kept: { $list }.
+    }
+noted-something-else = Noted { $entry }, not calculated: { $vessel } { $text }, { $when }.
 reading-kept = { at }{ $list }: kept, { $when }.
 button-added = I added it
 button-mine = I do this one
@@ -698,7 +704,6 @@ noted-addition =
 noted-bare = Noted { $entry }: { $vessel } { $added } SO2, { $when }.
 noted-measure = Measure free SO2 from { $when }, before adding again.
 noted-measure-now = Measure free SO2 before adding again.
-noted-other = Noted { $entry }, not calculated: { $vessel } { $text }, { $when }.
 already-noted = Already noted as { $entry } at { $when } ({ $who ->
         [you] you
        *[other] { $who }
@@ -715,7 +720,7 @@ when-no-such-day = { $vessel }: there is no such day as “{ $text }”. Not not
 ask-zone = I tell times in UTC. Which zone are you in? Write: time zone Europe/Madrid
 dosed-who =
     { $who ->
-        [you] You
+        [you] you
        *[other] { $who }
     }
 dosed-which-first =
@@ -729,17 +734,17 @@ dosed-add-more =
        *[some] { $list }
     } at { $when }. More all the same?
 dosed-sampled-before =
-    { $vessel }: no dose. { dosed-who } added { $known ->
+    { $vessel }: no dose: { dosed-who } added { $known ->
         [none] some
        *[some] { $list }
     } at { $when }, after that sample. Measure again from { $next }.
 dosed-landed =
-    { $vessel }: no more for now. { dosed-who } added { $known ->
+    { $vessel }: no more for now: { dosed-who } added { $known ->
         [none] some
        *[some] { $list }
     } at { $when }, and SO2 goes on binding for a day. Measure again from { $next }.
 dosed-in-round =
-    { $vessel }: no dose. { dosed-who } added { $known ->
+    { $vessel }: no dose: { dosed-who } added { $known ->
         [none] some
        *[some] { $list }
     } at { $when }. Send it alone.

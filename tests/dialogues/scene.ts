@@ -17,6 +17,7 @@ const MOVES = [
   'person',
   'name',
   'chat',
+  'cellar',
   'tick',
   'restart',
 ] as const;
@@ -39,7 +40,8 @@ const LINE = new RegExp(`^(${MOVES.join('|')}|us):(?: (.*))?$`);
 /**
  * Reads a scene. `them:` is what a person writes (lines that follow each other are one message), `us:` what we answer,
  * `press:` a button by its label, `sends:` what cannot be read. `later:` lets minutes pass (`3 h` hours, `2 d` days),
- * `person:` or `name:` and `language:` say who is there from now on, `chat:` in which chat of the cellar. `tick:` is the
+ * `person:` or `name:` and `language:` say who is there from now on, `chat:` in which chat, and `cellar:` in which cellar, where
+ * nothing is known yet. `tick:` is the
  * moment at which what is due is said, `restart:` begins the program anew with the same store. In an answer `…` stands
  * for any lines, and a line in square brackets for the buttons; a line in round brackets names another chat than the
  * present one, in which what follows is said.
@@ -104,10 +106,12 @@ export async function play(
   let language: IncomingMessage['language'] = 'en';
   let person = 'Ana';
   let chat = 'one';
+  let cellar = 'harbour cellar';
   /** What stands on the screen of each chat. */
   const shown = new Map<string, readonly Said[]>();
   const show = (where: string, said: readonly Said[]): void => {
-    if (said.some(({ buttons }) => buttons.length > 0)) shown.set(where, said);
+    // The newest first: a button of an older reply is still there to be pressed.
+    shown.set(where, [...said, ...(shown.get(where) ?? [])]);
   };
   const answers: string[][] = [];
   for (const [count, { does, what }] of moves.entries()) {
@@ -115,6 +119,7 @@ export async function play(
     if (does === 'language' && isLanguage(what)) language = what;
     if (does === 'person' || does === 'name') person = what;
     if (does === 'chat') chat = what;
+    if (does === 'cellar') cellar = what;
     if (does === 'restart') serve = serving(store, settings);
     if (does === 'tick') {
       const sent = await tick(store, at);
@@ -127,7 +132,7 @@ export async function play(
       answers.push([]);
       continue;
     }
-    const who = { cellar: 'harbour cellar', chat, person, name: person };
+    const who = { cellar, chat, person, name: person };
     const { said } = await serve({ ...who, id: String(count), at, language, content });
     show(chat, said);
     answers.push(said.flatMap(linesOf));

@@ -1,7 +1,7 @@
 import type { Line } from '../replies/reply.ts';
 import type { ImportProblem, ImportRead } from './import-read.ts';
 
-/** So many lines of a file are named; the rest is counted. */
+/** So many lines of a file, and words of it, are named; the other lines are counted. */
 const MOST_NAMED = 20;
 
 /**
@@ -24,7 +24,9 @@ export function importLines(read: ImportRead): Line[] {
     add('import-not-understood', { count, lines: named(notUnderstood) });
   }
   if (notTaken.length > 0) {
-    const list = notTaken.map((name) => ({ key: 'import-not-taken-name', values: { name } }));
+    const list = notTaken
+      .slice(0, MOST_NAMED)
+      .map((name) => ({ key: 'import-not-taken-name', values: { name } }));
     add('import-not-taken', {}, list);
   }
   if (assumedUnit !== undefined) add('import-unit', { unit: assumedUnit });

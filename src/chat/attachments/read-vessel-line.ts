@@ -3,7 +3,7 @@ import { isText } from './read-field.ts';
 import { readWords } from './read-words.ts';
 import type { VesselRow } from './vessel-row.ts';
 
-/** A line without headings, `T4; 5200 L; red; lot Blanca 2026`, and the names of readings in it that are not taken. */
+/** A line without headings, `T4; 5200 L; red; lot Blanca 2026`, and what in it is not taken: readings, unknown words. */
 export interface VesselLine {
   readonly row: Omit<VesselRow, 'line'>;
   readonly notTaken: readonly string[];
@@ -59,10 +59,10 @@ export function readVesselLine(text: string, settings: ReaderSettings): VesselLi
       ...(lot !== undefined && { lot }),
       ...(isEmpty && { empty: true }),
     },
-    notTaken: SAMPLED.filter((field) => told[field] !== undefined),
+    notTaken: [...SAMPLED.filter((field) => told[field] !== undefined), ...draft.strangers],
   };
 }
 
 const LONGEST_LOT = 100;
-/** How something was read that changes nothing here: equal barrels, a figure whose word was missing. */
-const HARMLESS: readonly string[] = ['each-or-total', 'ph-unlabelled', 'volume-sum'];
+/** How something was read that changes nothing here: equal barrels, a figure whose word was missing, a variety. */
+const HARMLESS: readonly string[] = ['each-or-total', 'ph-unlabelled', 'volume-sum', 'unread-words'];

@@ -55,6 +55,8 @@ export function readVesselRow(
   settings: ReaderSettings,
 ): Omit<VesselRow, 'line'> | undefined {
   if (cells.slice(headings.length).some((cell) => !isBlank(cell))) return undefined;
+  // A spreadsheet makes dates of numbers such as 3.5, and nobody can tell which it was.
+  if (headings.some(({ column }, i) => column !== undefined && cells[i] instanceof Date)) return undefined;
   const cellOf = (column: VesselColumn): TableCell => {
     const cell = cells[headings.findIndex((one) => one.column === column)];
     return isNothing(cell) ? undefined : cell;

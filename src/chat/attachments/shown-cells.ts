@@ -32,7 +32,9 @@ export const SHOWN_CELLS: Readonly<Record<ShownColumn, (row: RecordRow) => Cell>
   'wine-lot': ({ wine }) => wine.lot,
   wine: ({ wine }) => wine.wine,
   'us-gallons': ({ entry }) =>
-    'volume_L' in entry && entry.volume_L !== undefined ? litresTo(entry.volume_L, 'galUS') : undefined,
+    'volume_L' in entry && entry.volume_L !== undefined
+      ? rounded(litresTo(entry.volume_L, 'galUS'))
+      : undefined,
   calculated: ({ entry, words }) => {
     if (entry.kind === 'other') return words['is-not-calculated'];
     if (entry.kind !== 'addition' && entry.kind !== 'order') return undefined;
@@ -43,3 +45,6 @@ export const SHOWN_CELLS: Readonly<Record<ShownColumn, (row: RecordRow) => Cell>
 };
 
 const onTheWall = (at: number, zone: string): Cell => ({ local_ms: at + offsetAt(at, zone) });
+
+/** To 0.001 of its unit: for the eye, no trace of a conversion far behind the point. */
+const rounded = (value: number): number => Math.round(value * 1000) / 1000;

@@ -6,6 +6,7 @@ import { answerStatement } from './intents/command/statement.ts';
 import { answerDoseOfVessel } from './intents/dose-of-vessel.ts';
 import { answerEffect } from './intents/effect.ts';
 import { answerEmergency } from './intents/emergency.ts';
+import { answerOtherAddition } from './intents/other-addition.ts';
 import { answerProblem } from './intents/problem.ts';
 import { answerReading as answerKeptReading } from './intents/reading.ts';
 import { answerSolution } from './intents/solution.ts';
@@ -38,7 +39,7 @@ function saysSomething({ lines, inRound }: Outcome): boolean {
 
 function answerByIntent(reading: Reading, language: Language, turn: Turn): Outcome {
   if (reading.intent === 'emergency') return answerEmergency(language, reading.topic);
-  if (reading.problems.length > 0) return answerProblem(reading, turn);
+  if (reading.problems.length > 0) return answerOtherAddition(reading, turn) ?? answerProblem(reading, turn);
   switch (reading.intent) {
     case 'dose':
       return answerDoseOfVessel(reading, turn);

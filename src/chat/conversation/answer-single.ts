@@ -5,7 +5,7 @@ import { isBareNumber } from './bare-number.ts';
 import { belongs } from './complete.ts';
 import { questionFor } from './intents/asking.ts';
 import { line } from './lines/line.ts';
-import { newVesselLines } from './lines/new-vessel.ts';
+import { withKept } from './lines/kept.ts';
 import { problemLines } from './lines/problems.ts';
 import { vesselText } from './lines/vessel.ts';
 import { mannerOf, type Manner } from './manner.ts';
@@ -50,7 +50,7 @@ export function answerSingle(
   const muddle = vesselsProblem(textOf(message), reading, settings);
   const lines = muddle
     ? [muddle, line('question', 'problem-no-number', { again: 'correction' })]
-    : [...asked.lines, ...newVesselLines(reading, here, notes)];
+    : withKept(asked.lines, reading, here, notes);
   const reply: Reply = { language: settings.language, lines, buttons: asked.buttons };
   const said = [{ reading: logged, outcome, ref }];
   const next = nextMemory(here, understood, said, { buttons: reply.buttons, waiting, chosen });

@@ -17,10 +17,14 @@ export function dailyHoursOf(settings: Settings): DailyHours | undefined {
   return at_minute === 'off' ? undefined : { at_minute, quiet, zone: zoneOf(settings) };
 }
 
-/** The daily list of a chat at its next turn. */
-export function dailyDue(chat: string, at: number, about: Extract<DueAbout, { kind: 'daily' }>): Due {
-  // One of its kind for each moment, so that the same turn is never set twice.
-  return { id: dueId('daily', chat, String(at)), chat, at, about: JSON.stringify(about) };
+/** The daily list of a chat at its next turn, and when that was set; in milliseconds since 1970. */
+export function dailyDue(
+  chat: string,
+  { at, set_at }: { readonly at: number; readonly set_at: number },
+  about: Extract<DueAbout, { kind: 'daily' }>,
+): Due {
+  // With the moment it was set at: an id that was said is never taken again, and an hour may be set twice.
+  return { id: dueId('daily', chat, `${at} ${set_at}`), chat, at, about: JSON.stringify(about) };
 }
 
 /** The writes that set the daily list of this chat, where it is not set yet, or when its hour has changed. */
@@ -37,11 +41,15 @@ export async function scheduleDaily(
   const gone: Write[] = old ? [{ kind: 'said', id: old.id }] : [];
   if (hours === undefined) return [...gone, { kind: 'drop', key: dailyKey(chat) }];
   const about = old ? (JSON.parse(old.about) as Extract<DueAbout, { kind: 'daily' }>) : undefined;
-  const due = dailyDue(chat, nextDaily(at, hours), {
-    kind: 'daily',
-    language: settings.language,
-    ...(about?.said_at !== undefined && { said_at: about.said_at }),
-  });
-  if (old?.id === due.id) return [];
+  const due = dailyDue(
+    chat,
+    { at: nextDaily(at, hours), set_at: at },
+    {
+      kind: 'daily',
+      language: settings.language,
+      ...(about?.said_at !== undefined && { said_at: about.said_at }),
+    },
+  );
+  if (old?.at === due.at) return [];
   return [...gone, { kind: 'due', due }, { kind: 'keep', key: dailyKey(chat), text: due.id }];
 }

@@ -58,7 +58,11 @@ async function sayDaily(
   if (hours === undefined) return { writes: [said, { kind: 'drop', key: dailyKey(due.chat) }], replies: [] };
   const { at } = message;
   const turn = dailyTurn(at, { ...hours, ...(about.said_at !== undefined && { said_at: about.said_at }) });
-  const next = dailyDue(due.chat, turn.next, { ...about, ...(turn.is === 'now' && { said_at: at }) });
+  const next = dailyDue(
+    due.chat,
+    { at: turn.next, set_at: at },
+    { ...about, ...(turn.is === 'now' && { said_at: at }) },
+  );
   const writes: Write[] = [
     said,
     { kind: 'due', due: next },

@@ -85,9 +85,13 @@ export function recall(reading: Reading, here: Here): Reading {
   const vessel = here.vessels.get(fields.vessel);
   const facts = vessel ? factsOf(vessel, here.message.at - here.settings.ph_days * DAY_ms) : {};
   const wanted = { ...additiveFor(reading, fields.vessel, here), ...only(facts, names) };
+  const isAddition = fields.target !== undefined && 'add_mg_L' in fields.target;
   const isAsked = marks.volumeChoices ?? marks.fruitByWeight ?? marks.eachOrTotal;
   const fresh = Object.entries(wanted).filter(
-    ([name]) => fields[name as keyof Fields] === undefined && !(name === 'volume_L' && isAsked),
+    ([name]) =>
+      fields[name as keyof Fields] === undefined &&
+      !(name === 'volume_L' && isAsked) &&
+      !(name === 'ph' && isAddition),
   );
   if (fresh.length === 0) return reading;
   const { assumed: _assumed, asks: _asks, ...draft } = reading;

@@ -38,6 +38,8 @@ export async function handleText(text: string, here: Here, view: CellarView): Pr
   const near = await withVessels(here, view, vesselsNamed(whole));
   const [only, another] = whole.readings;
   if (only === undefined || another) return answerRound(checked(whole), near);
+  const plan = only && addedAsPlanned(only, near);
+  if (plan !== undefined) return handlePress(plan, near, view);
   const commanded = only.intent === 'command' ? await answerCommand(only, near, view) : undefined;
   if (commanded) return { ...commanded, understood: whole, answers: [null] };
   return answerSingle(checked(whole), near, { completes: whole !== understood });
@@ -57,6 +59,16 @@ function isNoButton(mark: string, memory: Memory): boolean {
 /** After a choice a number may repeat one of its figures, which is no reading. */
 function followsChoice({ lastButtons, lastWasChosen }: Memory): boolean {
   return lastButtons.some((key) => parseKey(key)?.does === 'c') || lastWasChosen === true;
+}
+
+/** "I added it": what was reckoned for that vessel last went in, or what stands above. */
+function addedAsPlanned({ intent, fields, asks, problems }: Reading, here: Here): string | undefined {
+  const { vessel, ...others } = fields;
+  if (intent !== 'added' || !asks.includes('mass_g') || problems.length > 0) return undefined;
+  if (Object.keys(others).some((name) => name !== 'additive')) return undefined;
+  if (vessel === undefined) return here.memory.lastButtons.find((key) => parseKey(key)?.does === 'a');
+  const plan = here.plans.get(vessel);
+  return plan && `a:${plan.ref}`;
 }
 
 async function answerChosen(

@@ -10,6 +10,7 @@ import type {
 import { litresTo } from '../../core/units/volume.ts';
 import type { Basis } from '../../core/wine.ts';
 import type { AskedField, Fields, Reading } from '../reader/understood.ts';
+import type { Settings } from './settings.ts';
 
 /** While one of these is asked, the additive is not settled and no amount of it may be given. */
 const SETTLES_ADDITIVE: readonly AskedField[] = [
@@ -89,7 +90,10 @@ function optionalAdditive(reading: Reading): { additive?: AdditiveAtHand } {
 }
 
 /** The question for a dose that a reading asks. Assumptions count as facts; what is asked stays out. */
-export function toDoseRequest(reading: Reading, basis: Basis): DoseRequest {
+export function toDoseRequest(
+  reading: Reading,
+  { basis, targets }: Pick<Settings, 'basis' | 'targets'>,
+): DoseRequest {
   const count = countOf(reading);
   const target = reading.asks.includes('target')
     ? undefined
@@ -104,6 +108,7 @@ export function toDoseRequest(reading: Reading, basis: Basis): DoseRequest {
     ...stageOf(reading),
     ...pick(reading.fields, ['binding_allowance_percent', 'binding_share']),
     basis,
+    red_target_mg_L: targets.red,
   };
 }
 

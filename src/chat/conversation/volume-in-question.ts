@@ -17,8 +17,9 @@ export function volumeInQuestion(reading: Reading, here: Here): Reading | undefi
   const { vessel: name, volume_L } = fields;
   const vessel = name === undefined ? undefined : here.vessels.get(name);
   if (vessel === undefined || volume_L === undefined || recalled?.volume_L !== undefined) return undefined;
-  if (problems.length > 0 || marks.volumeChoices || marks.conditional || intent === 'solution')
-    return undefined;
+  // What went in is a fact, whatever volume it is told with.
+  if (intent !== 'dose' && intent !== 'effect') return undefined;
+  if (problems.length > 0 || marks.volumeChoices || marks.conditional) return undefined;
   const known_L = vessel.volume_L?.value;
   const capacity_L = vessel.capacity_L?.value;
   const isOther = known_L !== undefined && Math.abs(volume_L - known_L) > SAME_VOLUME_share * known_L;

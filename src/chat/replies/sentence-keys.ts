@@ -98,7 +98,7 @@ export interface SentenceValues {
   'choice-no-amount': 'free' | 'limit' | 'molecular';
   'choice-over': 'limit' | 'vessel';
   'choice-powder': 'value';
-  'choice-red': 'amount' | 'count' | 'free' | 'kind' | 'limit' | 'unit';
+  'choice-red': 'amount' | 'count' | 'free' | 'kind' | 'limit' | 'red' | 'unit';
   'choice-tablet_SO2_g': 'value';
   'choice-tablet_salt_g': 'value';
   'choice-to':
@@ -106,7 +106,7 @@ export interface SentenceValues {
   'choice-volume_L': 'value';
   'claim-taken': 'vessel' | 'when' | 'who';
   claimed: 'until' | 'vessel';
-  'condition-red': 'amount' | 'count' | 'kind' | 'limit' | 'unit';
+  'condition-red': 'amount' | 'count' | 'kind' | 'limit' | 'red' | 'unit';
   'condition-stage': never;
   'daily-head': never;
   'day-empty': 'day';
@@ -304,7 +304,7 @@ export interface SentenceValues {
   'noted-bare': 'added' | 'entry' | 'vessel' | 'when';
   'noted-measure': 'when';
   'noted-measure-now': never;
-  'noted-other': 'entry' | 'text' | 'vessel' | 'when';
+  'noted-something-else': 'entry' | 'text' | 'vessel' | 'when';
   'noted-vessel': 'entry' | 'list' | 'voids';
   'nothing-why': 'free' | 'kind' | 'molecular' | 'ph' | 'value';
   'nothing-why-free': 'free' | 'kind' | 'value';
@@ -346,6 +346,7 @@ export interface SentenceValues {
   'problem-vessel-twice': 'vessel';
   'problem-volume-not-positive': 'about' | 'vessel';
   read: 'list';
+  'read-kept': 'list' | 'new' | 'vessel';
   'reading-kept': 'list' | 'vessel' | 'when';
   'reading-read': 'list' | 'vessel';
   recalled: 'day' | 'list';
@@ -368,6 +369,7 @@ export interface SentenceValues {
   'round-for-all': 'list';
   'round-head': 'additive' | 'kind' | 'size';
   'round-if-red': 'red' | 'redAmount';
+  'round-kept': never;
   'round-low': 'list';
   'round-missing': 'field' | 'vessel';
   'round-name': 'name';
@@ -376,7 +378,7 @@ export interface SentenceValues {
   'round-nothing-bare': 'vessel';
   'round-of': 'additive' | 'strength';
   'round-percent': 'strength';
-  'round-red': never;
+  'round-red': 'red';
   'round-rest': 'list' | 'strength';
   'round-stock': 'list' | 'strength';
   'round-stock-of': 'amount' | 'vessel';
@@ -466,7 +468,6 @@ export interface SentenceValues {
   'vessel-check-due': 'when' | 'why';
   'vessel-empty': 'day' | 'vessel';
   'vessel-head': 'list' | 'vessel';
-  'vessel-new': 'vessel';
   'vessel-order': 'entry' | 'list' | 'when' | 'who';
   'vessel-readings': 'list';
   'vessel-unknown': 'vessel';

@@ -39,7 +39,7 @@ const SAID_BY_THE_CHOICE: readonly WarningCode[] = [
 
 /** The answer to a question for a dose: no sulfite now, a choice, a dose, or what can be said so far and one question. */
 export function answerDose(reading: Reading, turn: Turn): Outcome {
-  const request = toDoseRequest(reading, turn.settings.basis);
+  const request = toDoseRequest(reading, turn.settings);
   const answer = dose(request);
   if (reading.notes.some(({ id }) => id === 'ferment-stop')) return fermentStop(reading, null, turn);
   const refused = noDose(reading, answer, turn) ?? notPermitted(reading, answer, turn);

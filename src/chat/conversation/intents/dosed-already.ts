@@ -5,7 +5,6 @@ import { momentText } from '../../replies/moment-text.ts';
 import { vesselName } from '../../replies/vessel-name.ts';
 import type { Reading } from '../../reader/understood.ts';
 import type { Line } from '../../replies/reply.ts';
-import { assumedLines } from '../lines/assumed.ts';
 import { buttonsFor } from '../buttons.ts';
 import { factLines } from '../lines/facts.ts';
 import { landedLines } from '../lines/landed.ts';
@@ -63,7 +62,7 @@ function asked(
   return {
     answer: null,
     inRound: [dosedLine(dosed, 'dosed-in-round', turn)],
-    lines: [...first, ...factLines(reading, turn.manner), ...assumedLines(reading, turn.manner, false)],
+    lines: [...first, ...factLines(reading, turn.manner)],
     buttons: buttonsFor(turn.ref, does),
   };
 }
@@ -97,7 +96,7 @@ function landedToday(reading: Reading, dosed: Dosed, free_mg_L: number, turn: Tu
   return {
     answer: null,
     inRound: lines.slice(0, 1),
-    lines: [...lines, ...factLines(reading, manner), ...assumedLines(reading, manner, false)],
+    lines: [...lines, ...factLines(reading, manner)],
     buttons: buttonsFor(turn.ref, ['gd']),
   };
 }

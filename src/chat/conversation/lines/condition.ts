@@ -1,6 +1,6 @@
 import type { DoseAnswer, Measure, Warning } from '../../../core/dose/answer.ts';
 import type { Reading } from '../../reader/understood.ts';
-import { concentrationText } from '../../replies/quantity-text.ts';
+import { concentrationText, molecularText } from '../../replies/quantity-text.ts';
 import type { Line } from '../../replies/reply.ts';
 import { perLitre, type Manner } from '../manner.ts';
 import { line } from './line.ts';
@@ -25,7 +25,8 @@ export function conditionLines(reading: Reading, answer: DoseAnswer, manner: Man
  */
 export function redValues(values: Warning['values'], manner: Manner): Line['values'] {
   const limit = concentrationText(numberIn(values, 'limit_mg_L'), manner.mark);
-  const more = { kind: values['over_limit'] === undefined ? 'some' : 'over', limit };
+  const red = redTargetText(values, manner.mark);
+  const more = { kind: values['over_limit'] === undefined ? 'some' : 'over', limit, red };
   const each = measureNamed(values, 'each_measure');
   const measure = each ?? measureNamed(values, 'measure');
   const amount = bareAmount(measure, each ? 'several' : 'one', manner);
@@ -33,6 +34,11 @@ export function redValues(values: Warning['values'], manner: Manner): Line['valu
   const dose = numberIn(values, 'dose_mg_L');
   const rise = { unit: 'other', count: 'one', amount: `+ ${perLitre(dose, manner)}` };
   return dose === 0 ? { ...more, ...rise, kind: 'none', amount: 'none' } : { ...more, ...rise };
+}
+
+/** What a red is aimed at in those figures, as text without its unit. */
+export function redTargetText(values: Warning['values'], mark: Manner['mark']): string {
+  return molecularText(numberIn(values, 'target_molecular_mg_L'), mark);
 }
 
 function measureNamed(values: Warning['values'], name: string): Measure | undefined {

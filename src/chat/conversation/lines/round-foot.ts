@@ -9,7 +9,7 @@ import type { Said } from '../next-memory.ts';
 import type { Note } from '../note.ts';
 import { additiveOf } from '../to-requests.ts';
 import { assumedLines } from './assumed.ts';
-import { redFigures } from './condition.ts';
+import { redFigures, redTargetText } from './condition.ts';
 import { line, listLine, part } from './line.ts';
 import { roundCautions } from './round-cautions.ts';
 
@@ -48,6 +48,7 @@ export function roundFoot(
     ...stockLines(said, mark),
     ...(holds('added') ? [line('effect', 'measure-tomorrow')] : []),
     ...(weighs ? [line('effect', 'round-effect')] : []),
+    ...(said.some(({ notes }) => notes.length > 0) && !holds('added') ? [line('effect', 'round-kept')] : []),
     ...(said.some(({ reading }) => reading.problems.length > 0) ? [line('question', 'round-again')] : []),
     ...mergeLists(assumed),
     ...lowLines(said),
@@ -82,11 +83,13 @@ function stockLines(said: readonly SaidInRound[], mark: DecimalMark): Line[] {
   const list = small.map(({ vessel, stock }) =>
     part('round-stock-of', { vessel, amount: measureText(stock.measure, mark) }),
   );
-  const hasRed = said.some(
-    (one) => isWeighed(one) && redFigures(doseOf(one) ?? { warnings: [] }) !== undefined,
-  );
+  const reds = said
+    .filter(isWeighed)
+    .map((one) => redFigures(doseOf(one) ?? { warnings: [] }))
+    .find((one) => one !== undefined);
+  const red = reds === undefined ? undefined : redTargetText(reds, mark);
   return [
-    ...(hasRed ? [line('condition', 'round-red')] : []),
+    ...(red === undefined ? [] : [line('condition', 'round-red', { red })]),
     ...listLine('effect', isRest ? 'round-rest' : 'round-stock', list).map((one) => ({
       ...one,
       values: { strength },

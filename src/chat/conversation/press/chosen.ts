@@ -15,7 +15,7 @@ export function chosen(
   place: number,
   here: Here,
 ): { readonly target: Target } | { readonly lines: Line[] } | undefined {
-  const choice = dose(toDoseRequest(reading, here.settings.basis)).choices?.[place];
+  const choice = dose(toDoseRequest(reading, here.settings)).choices?.[place];
   if (choice === undefined) return undefined;
   const manner = mannerOf(reading, here.memory.decimalMark ?? '.', here);
   const vessel = vesselText(reading);

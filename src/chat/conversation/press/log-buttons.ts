@@ -92,7 +92,7 @@ export function alreadyNoted(entry: LoggedEntry, here: Here): Handled {
 function doseAsAddition({ reading }: Remembered, here: Here): Addition | undefined {
   const vessels = vesselsIn(reading.fields);
   if (vessels.length === 0 || reading.intent !== 'dose') return undefined;
-  const weighed = toBeWeighed(reading, dose(toDoseRequest(reading, here.settings.basis)));
+  const weighed = toBeWeighed(reading, dose(toDoseRequest(reading, here.settings)));
   if (weighed === undefined) return undefined;
   const [order] = vessels.length === 1 ? (here.vessels.get(vessels[0] ?? '')?.orders ?? []) : [];
   return {

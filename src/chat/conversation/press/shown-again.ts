@@ -2,7 +2,7 @@ import { added } from '../../../core/dose/added.ts';
 import { dose } from '../../../core/dose/dose.ts';
 import { effect } from '../../../core/dose/effect.ts';
 import { solution } from '../../../core/dose/solution.ts';
-import type { Warning } from '../../../core/dose/answer.ts';
+import type { DoseAnswer, Warning } from '../../../core/dose/answer.ts';
 import type { Step } from '../../../core/working.ts';
 import type { Reading } from '../../reader/understood.ts';
 import type { Button, Line } from '../../replies/reply.ts';
@@ -17,6 +17,8 @@ import type { Here } from '../here.ts';
 import { mannerOf } from '../manner.ts';
 import type { Remembered } from '../memory.ts';
 import type { Settings } from '../settings.ts';
+import { toBeWeighed } from '../to-be-weighed.ts';
+import { vesselsIn } from '../vessels-named.ts';
 import {
   additiveOf,
   toAddedRequest,
@@ -42,7 +44,7 @@ function reckonAgain(reading: Reading, settings: Settings): Reckoned {
       return request ? { ...solution(request), warnings: [] } : { steps: [], warnings: [] };
     }
     case 'dose':
-      return dose(toDoseRequest(reading, settings.basis));
+      return dose(toDoseRequest(reading, settings));
     case 'reading':
     case 'titration':
     case 'command':
@@ -71,7 +73,11 @@ export function safetyLines(reading: Reading): Line[] {
   ];
 }
 
-function buttonsBehind(reading: Reading, warned: readonly Warning[]): (keyof typeof LABELS)[] {
+function buttonsBehind(
+  reading: Reading,
+  warned: readonly Warning[],
+  hasDose: boolean,
+): (keyof typeof LABELS)[] {
   if (reading.intent !== 'dose') return ['w', 's'];
   return [
     ...(reading.assumed.stage === undefined ? [] : (['nf'] as const)),
@@ -79,6 +85,7 @@ function buttonsBehind(reading: Reading, warned: readonly Warning[]): (keyof typ
     'w',
     's',
     't',
+    ...(vesselsIn(reading.fields).length > 0 && hasDose ? (['o'] as const) : []),
   ];
 }
 
@@ -87,11 +94,15 @@ export function moreLines(found: Remembered, here: Here): { lines: Line[]; butto
   const { settings, memory } = here;
   const { reading, ref } = found;
   const manner = mannerOf(reading, memory.decimalMark ?? '.', here);
-  const warned = reckonAgain(reading, settings).warnings;
+  const reckoned = reckonAgain(reading, settings);
+  const warned = reckoned.warnings;
   const warnings = allWarningLines(warned, manner);
   const head = line('first', 'more-head', { vessel: vesselText(reading) });
   return {
     lines: [head, ...(warnings.length > 0 ? warnings : [line('first', 'more-no-warnings')])],
-    buttons: buttonsFor(ref, buttonsBehind(reading, warned)),
+    buttons: buttonsFor(
+      ref,
+      buttonsBehind(reading, warned, toBeWeighed(reading, reckoned as DoseAnswer) !== undefined),
+    ),
   };
 }
