@@ -13,7 +13,8 @@ export function writeCsv(sheet: Sheet, mark: DecimalMark): Uint8Array {
     delimiter: mark === ',' ? ';' : ',',
     record_delimiter: '\r\n',
     escape_formulas: true,
-    quoted_match: /^\s|\s$/,
+    // A lone line feed or carriage return too, as readers differ in what ends a line.
+    quoted_match: /^\s|\s$|[\r\n]/,
     cast: { number: (value) => String(value).replace('.', mark) },
   });
   return new TextEncoder().encode(text);
