@@ -1,8 +1,9 @@
 /** `npm run bench`: what a message costs, beside what was aimed at. Aims are no tests: machines differ. */
 import { handle } from '../../src/chat/conversation/conversation.ts';
-import { FRESH_MEMORY } from '../../src/chat/conversation/memory.ts';
 import { DEFAULT_SETTINGS } from '../../src/chat/conversation/settings.ts';
 import { readMessage } from '../../src/chat/reader/read-message.ts';
+import { makeServe } from '../../src/edge/serve-message.ts';
+import { createMemoryCellars } from '../../src/edge/store/memory-cellars.ts';
 import { say } from '../fuzz/say.ts';
 import { writtenMessages } from '../fuzz/written-messages.ts';
 import { HARD_TEXTS } from './hard-texts.ts';
@@ -20,14 +21,23 @@ function row(name: string, seen: string, aim = ''): void {
 const ms = (milliseconds: number): string =>
   `${milliseconds >= 100 ? Math.round(milliseconds) : milliseconds.toPrecision(3)} ms`;
 
-/** From the bytes of a message to the text of its replies. */
-function answer(body: string): string {
+const store = createMemoryCellars({ now: () => 0 });
+const serve = makeServe({ handle, say, store, settings: DEFAULT_SETTINGS, report: throwIt });
+
+function throwIt(fault: unknown): never {
+  throw fault;
+}
+
+let messages = 0;
+
+/** From the bytes of a message to the text of its replies, by somebody who never wrote. */
+async function answer(body: string): Promise<string> {
   const { text } = JSON.parse(body) as { readonly text: string };
-  const who = { cellar: 'c', chat: 'c', person: 'p' };
+  messages += 1;
+  const who = { cellar: `c${messages}`, chat: 'c', person: 'p' };
   const message = { ...who, id: '1', at: 0, language: 'en', content: { kind: 'text', text } } as const;
-  return handle(message, FRESH_MEMORY, DEFAULT_SETTINGS)
-    .replies.map((reply) => say(reply).text)
-    .join('\n');
+  const { said } = await serve(message);
+  return said.map((one) => one.text).join('\n');
 }
 
 /** The barest bot: the same bytes in, their text out. */
@@ -42,8 +52,8 @@ function bytesOf(text: string): string {
 row('what', 'seen', 'aim');
 
 const typical = bytesOf(TYPICAL);
-const answered = timeOf(() => answer(typical), { times: 4000, warmUp: 2000 });
-const manyEchoes = timeOf(() => Array.from({ length: 1000 }, () => echo(typical)), {
+const answered = await timeOf(() => answer(typical), { times: 4000, warmUp: 2000 });
+const manyEchoes = await timeOf(() => Array.from({ length: 1000 }, () => echo(typical)), {
   times: 200,
   warmUp: 50,
 });
@@ -51,29 +61,33 @@ row('answer to one reading', ms(answered), 'at most 0.3 ms, wished 0.15 ms');
 row('… against echoing it', `${Math.round(answered / (manyEchoes / 1000))} ×`);
 row(
   'reading of it alone',
-  ms(timeOf(() => readMessage(TYPICAL, DEFAULT_SETTINGS), { times: 4000, warmUp: 500 })),
+  ms(await timeOf(() => readMessage(TYPICAL, DEFAULT_SETTINGS), { times: 4000, warmUp: 500 })),
 );
 
-const perLine = [10, 200].map((vessels) => {
+const perLine: number[] = [];
+for (const vessels of [10, 200]) {
   const body = bytesOf(roundOf(vessels));
-  const once = timeOf(() => answer(body), { times: 100, warmUp: 20 });
+  const once = await timeOf(() => answer(body), { times: 100, warmUp: 20 });
   row(`round of ${vessels}, a line`, ms(once / vessels));
-  return once / vessels;
-});
+  perLine.push(once / vessels);
+}
 row(
   '… a line of 200 against a line of 10',
   `${((perLine[1] ?? 0) / (perLine[0] ?? 1)).toFixed(2)} ×`,
   'at most 1.2 ×',
 );
 
-const read = (text: string): number =>
+const read = (text: string): Promise<number> =>
   timeOf(() => readMessage(text, DEFAULT_SETTINGS), { times: 15, warmUp: 5 });
-const written = writtenMessages().map((text) => [text, read(text)] as const);
+const written: (readonly [string, number])[] = [];
+for (const text of writtenMessages()) written.push([text, await read(text)]);
 const [worstText, worst] = written.toSorted(([, a], [, b]) => b - a)[0] ?? ['', 0];
 row(`reading ${written.length} written messages, median`, ms(median(written.map(([, time]) => time))));
 row('… the slowest', ms(worst), `at most 5 ms: ${JSON.stringify(worstText.slice(0, 40))}`);
 
-const hard = HARD_TEXTS.map(([name, text]) => [name, read(text)] as const).toSorted(([, a], [, b]) => b - a);
+const hard: (readonly [string, number])[] = [];
+for (const [name, text] of HARD_TEXTS) hard.push([name, await read(text)]);
+hard.sort(([, a], [, b]) => b - a);
 row(`reading ${hard.length} texts of 4,096 characters, median`, ms(median(hard.map(([, time]) => time))));
 for (const [name, time] of hard.slice(0, 3)) row(`… ${name}`, ms(time), 'at most 5 ms');
 

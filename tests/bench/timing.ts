@@ -3,13 +3,16 @@ export function median(values: readonly number[]): number {
   return values.toSorted((a, b) => a - b)[Math.floor(values.length / 2)] ?? Number.NaN;
 }
 
-/** Milliseconds that one call takes: the median of several, after a few that only warm up. */
-export function timeOf(call: () => unknown, { times, warmUp }: { times: number; warmUp: number }): number {
-  for (let i = 0; i < warmUp; i += 1) call();
+/** Milliseconds that one call takes until it has ended: the median of several, after a few that only warm up. */
+export async function timeOf(
+  call: () => unknown,
+  { times, warmUp }: { times: number; warmUp: number },
+): Promise<number> {
+  for (let i = 0; i < warmUp; i += 1) await call();
   const seen: number[] = [];
   for (let i = 0; i < times; i += 1) {
     const begun = performance.now();
-    call();
+    await call();
     seen.push(performance.now() - begun);
   }
   return median(seen);

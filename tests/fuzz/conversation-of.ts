@@ -1,10 +1,11 @@
 import fc from 'fast-check';
 import { handle } from '../../src/chat/conversation/conversation.ts';
-import { FRESH_MEMORY } from '../../src/chat/conversation/memory.ts';
+import { memoryKey } from '../../src/chat/conversation/keys.ts';
 import type { Memory } from '../../src/chat/conversation/memory.ts';
 import type { Content, Handled, IncomingMessage } from '../../src/chat/conversation/ports.ts';
 import { DEFAULT_SETTINGS } from '../../src/chat/conversation/settings.ts';
 import type { Language } from '../../src/chat/reader/understood.ts';
+import { createMemoryCellars } from '../../src/edge/store/memory-cellars.ts';
 import { anyText } from './any-text.ts';
 
 /** What one person sends, one thing after the other: texts, and now and then a press on a button just seen. */
@@ -16,11 +17,13 @@ export interface Talk {
 /** A turn with all that is needed to judge it. */
 export interface Turn {
   readonly message: IncomingMessage;
-  readonly memory: Memory;
   readonly handled: Handled;
+  /** The same message handled once more in the same cellar, before anything was written. */
+  readonly again: Handled;
   readonly milliseconds: number;
 }
 
+const WHO = { cellar: 'c', chat: 'c', person: 'p', name: 'Ana' } as const;
 const BEGIN = Date.UTC(2026, 8, 14, 6);
 
 /** Short talks: mostly one message, so that memory does not hide what a message alone does. */
@@ -35,22 +38,27 @@ export const anyTalk: fc.Arbitrary<Talk> = fc.record({
   ),
 });
 
-/** Plays a talk turn by turn; what each writes is what the next one remembers. */
-export function* play(talk: Talk): Generator<Turn> {
-  let memory: Memory = FRESH_MEMORY;
+/** Plays a talk turn by turn; what each writes is what the next one finds in the cellar. */
+export async function* play(talk: Talk): AsyncGenerator<Turn> {
   let at = BEGIN;
+  const store = createMemoryCellars({ now: () => at });
   for (const [number, turn] of talk.turns.entries()) {
     at += turn.minutes * 60_000;
-    const message = messageOf(turnContent(turn, memory), { talk, number, at });
-    const begun = performance.now();
-    const handled = handle(message, memory, DEFAULT_SETTINGS);
-    yield { message, memory, handled, milliseconds: performance.now() - begun };
-    memory = handled.writes.findLast((write) => write.kind === 'memory')?.memory ?? memory;
+    yield await store.turn(WHO.cellar, async (view) => {
+      const kept = await view.kept(memoryKey(WHO));
+      const lastButtons = kept === undefined ? [] : (JSON.parse(kept) as Memory).lastButtons;
+      const message = messageOf(turnContent(turn, lastButtons), { talk, number, at });
+      const begun = performance.now();
+      const handled = await handle(message, view, DEFAULT_SETTINGS);
+      const milliseconds = performance.now() - begun;
+      const again = await handle(message, view, DEFAULT_SETTINGS);
+      return { writes: handled.writes, result: { message, handled, again, milliseconds } };
+    });
   }
 }
 
-function turnContent(turn: Talk['turns'][number], memory: Memory): Content {
-  const key = turn.press === undefined ? undefined : memory.lastButtons[turn.press];
+function turnContent(turn: Talk['turns'][number], lastButtons: readonly string[]): Content {
+  const key = turn.press === undefined ? undefined : lastButtons[turn.press];
   return key === undefined ? { kind: 'text', text: turn.text } : { kind: 'press', key };
 }
 
@@ -58,6 +66,5 @@ function messageOf(
   content: Content,
   { talk, number, at }: { readonly talk: Talk; readonly number: number; readonly at: number },
 ): IncomingMessage {
-  const who = { cellar: 'c', chat: 'c', person: 'p' };
-  return { ...who, id: String(number), at, language: talk.language, content };
+  return { ...WHO, id: String(number), at, language: talk.language, content };
 }

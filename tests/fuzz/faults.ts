@@ -1,6 +1,5 @@
-import { handle } from '../../src/chat/conversation/conversation.ts';
+import type { Write } from '../../src/core/cellar/cellar-store.ts';
 import type { Answer } from '../../src/chat/conversation/ports.ts';
-import { DEFAULT_SETTINGS } from '../../src/chat/conversation/settings.ts';
 import type { Fields, Reading } from '../../src/chat/reader/understood.ts';
 import type { Reply } from '../../src/chat/replies/reply.ts';
 import type { Turn } from './conversation-of.ts';
@@ -11,8 +10,7 @@ const SLIPS = ['NaN', 'undefined', 'Infinity', '[object', '{$', '{ $', '???'];
 
 /** All that is wrong with how one message was handled; empty when nothing is. */
 export function faults(turn: Turn): string[] {
-  const { message, memory, handled } = turn;
-  const again = handle(message, memory, DEFAULT_SETTINGS);
+  const { handled, again } = turn;
   const readings = handled.understood?.readings ?? [];
   const answers = handled.answers ?? [];
   return [
@@ -26,6 +24,7 @@ export function faults(turn: Turn): string[] {
     }),
     ...readings.flatMap((reading, at) => unsaid(reading, answers[at] ?? null, handled.replies)),
     ...handled.replies.flatMap((reply) => wrongKind(readings, reply)),
+    ...wrongNotes(readings, handled.writes),
   ];
 }
 
@@ -56,6 +55,18 @@ function wrongKind(readings: readonly Reading[], reply: Reply): string[] {
       ? [...doses, ...reply.buttons.map((one) => one.label)].map((key) => `${key} in an emergency`)
       : []),
   ];
+}
+
+/** What the log must not get from a message that is not understood, or that is for help. */
+function wrongNotes(readings: readonly Reading[], writes: readonly Write[]): string[] {
+  const kinds = writes.flatMap((write) => (write.kind === 'entry' ? [write.entry.kind] : []));
+  const isWrong = readings.length > 0 && readings.every(({ problems }) => problems.length > 0);
+  const isEmergency = readings.some(({ intent }) => intent === 'emergency');
+  return kinds.flatMap((kind) => [
+    // What is not calculated is noted as it was written.
+    ...(isWrong && kind !== 'other' ? [`a ${kind} noted beside a problem`] : []),
+    ...(isEmergency ? [`a ${kind} noted in an emergency`] : []),
+  ]);
 }
 
 function wrongAnswer(reading: Reading, fields: Fields, answer: Answer | null): string[] {

@@ -19,10 +19,10 @@ const FAULTS_SHOWN = 12;
 let played = 0;
 let slowest = { milliseconds: 0, text: '' };
 
-function judge(talk: Talk): string[] {
+async function judge(talk: Talk): Promise<string[]> {
   const found: string[] = [];
   try {
-    for (const turn of play(talk)) {
+    for await (const turn of play(talk)) {
       played += 1;
       const text = turn.message.content.kind === 'text' ? turn.message.content.text : '';
       if (turn.milliseconds > slowest.milliseconds) slowest = { milliseconds: turn.milliseconds, text };
@@ -39,14 +39,16 @@ function judge(talk: Talk): string[] {
 process.stdout.write(`seed ${seed}\n`);
 const failed = new Map<string, Talk>();
 for (let round = 0; played < wanted && failed.size < FAULTS_SHOWN; round += 1) {
-  const details = fc.check(
+  const details = await fc.check(
     // A fault that is known already does not stop the search for the next one.
-    fc.property(anyTalk, (talk) => judge(talk).every((fault) => failed.has(kindOf(fault)))),
+    fc.asyncProperty(anyTalk, async (talk) =>
+      (await judge(talk)).every((fault) => failed.has(kindOf(fault))),
+    ),
     { seed: seed + round, numRuns: Math.min(TALKS_A_ROUND, wanted - played) },
   );
   const talk = details.counterexample?.[0];
   if (talk === undefined) continue;
-  for (const fault of judge(talk)) {
+  for (const fault of await judge(talk)) {
     if (failed.has(kindOf(fault))) continue;
     failed.set(kindOf(fault), talk);
     process.stdout.write(`${fault}\n  ${JSON.stringify(talk)}\n`);

@@ -6,10 +6,9 @@ import type { Turn } from '../fuzz/conversation-of.ts';
 import { faults } from '../fuzz/faults.ts';
 
 /** What is tried on any message has to notice when something is wrong: here it is wrong on purpose. */
-function turnOf(text: string): Turn {
-  const [turn] = play({ language: 'en', turns: [{ text, minutes: 0 }] });
-  if (turn === undefined) throw new TypeError('Cannot play a talk without a turn');
-  return turn;
+async function turnOf(text: string): Promise<Turn> {
+  const { value } = await play({ language: 'en', turns: [{ text, minutes: 0 }] }).next();
+  return value as Turn;
 }
 
 function withReading(handled: Handled, change: Partial<Reading>): Handled {
@@ -19,7 +18,9 @@ function withReading(handled: Handled, change: Partial<Reading>): Handled {
   return { ...handled, understood: { ...understood, readings } };
 }
 
-const DOSE = turnOf('T4 1450 gal pH 3.58 free 21');
+const DOSE = await turnOf('T4 1450 gal pH 3.58 free 21');
+const NOTED = await turnOf('T4 now free 38 total 96 pH 3.6');
+const PROBLEM: Partial<Reading> = { problems: [{ code: 'too-long', about: '' }] };
 const REPLY = DOSE.handled.replies[0]!;
 
 test('a good answer has no faults', () => {
@@ -27,15 +28,17 @@ test('a good answer has no faults', () => {
 });
 
 test.each<[string, Handled]>([
-  ['an answer beside a problem', withReading(DOSE.handled, { problems: [{ code: 'too-long', about: '' }] })],
+  ['an answer beside a problem', withReading(DOSE.handled, PROBLEM)],
   [
     'a question beside a problem',
     withReading(DOSE.handled, { problems: [{ code: 'too-long', about: '' }], asks: ['ph'] }),
   ],
   ['an amount without volume', withReading(DOSE.handled, { fields: { ph: 3.58, free_mg_L: 21 } })],
   ['an amount while ph is asked', withReading(DOSE.handled, { asks: ['ph'] })],
-  ['dose-weigh beside a problem', withReading(DOSE.handled, { problems: [{ code: 'too-long', about: '' }] })],
-  ['button-working in an emergency', withReading(DOSE.handled, { intent: 'emergency' })],
+  ['dose-weigh beside a problem', withReading(DOSE.handled, PROBLEM)],
+  ['button-added in an emergency', withReading(DOSE.handled, { intent: 'emergency' })],
+  ['a reading noted beside a problem', withReading(NOTED.handled, PROBLEM)],
+  ['a reading noted in an emergency', withReading(NOTED.handled, { intent: 'emergency' })],
   ['an answer to chat', withReading(DOSE.handled, { intent: 'chat' })],
   ['no reply', { ...DOSE.handled, replies: [] }],
   ['an empty reply', { ...DOSE.handled, replies: [{ ...REPLY, lines: [] }] }],
