@@ -1,31 +1,31 @@
-import type { Handled, IncomingMessage, StatePort } from '../../chat/conversation/ports.ts';
-import { faultReply } from '../../chat/conversation/fault-reply.ts';
-import type { Memory } from '../../chat/conversation/memory.ts';
+import type { IncomingMessage, Who } from '../../chat/conversation/ports.ts';
 import type { Language } from '../../chat/reader/understood.ts';
-import type { Reply } from '../../chat/replies/reply.ts';
-import type { Said } from '../../chat/replies/say.ts';
+import type { Said, Say } from '../../chat/replies/say.ts';
 import type { Audit } from '../audit-workings.ts';
+import type { Serve } from '../serve-message.ts';
 import { batchLines } from './batch-lines.ts';
 
 /** Everything that a chat on a keyboard needs, handed in. */
 export interface TerminalOptions {
-  readonly handle: (message: IncomingMessage, memory: Memory) => Handled;
-  readonly say: (reply: Reply) => Said;
-  readonly state: StatePort;
+  readonly serve: Serve;
+  readonly say: Say;
   readonly input: NodeJS.ReadableStream;
   readonly output: NodeJS.WritableStream;
   /** The time in milliseconds since 1970. */
   readonly now: () => number;
   readonly language: Language;
+  /** The name of whoever sits there. */
+  readonly name?: string;
   /** Checks the workings, after their answers. */
   readonly audit?: Audit;
-  /** Tells whoever runs the program of a fault of its own. */
-  readonly report: (fault: unknown) => void;
   /** Whether a person sits there: then there is a greeting and a prompt. */
   readonly interactive: boolean;
   /** Ends the chat. */
   readonly signal?: AbortSignal;
 }
+
+/** The chat on a keyboard: one person in one cellar. */
+export const AT_TERMINAL: Who = { cellar: 'cellar', chat: 'terminal', person: 'terminal' };
 
 const PROMPT = '> ';
 
@@ -45,40 +45,29 @@ export async function runTerminal(options: TerminalOptions): Promise<void> {
   }
   prompt();
   const quiet_ms = interactive ? QUIET_ms.keyboard : QUIET_ms.pipe;
+  const begun = options.now();
   let count = 0;
   for await (const text of batchLines(input, {
     quiet_ms,
     ...(options.signal && { signal: options.signal }),
   })) {
     count += 1;
-    for (const said of await answer(text, count, options)) show(asShown(said));
+    // No message of any earlier run has the same: what a message notes is noted once under its id.
+    for (const said of await answer(text, `${begun} ${count}`, options)) show(asShown(said));
     show('');
     prompt();
   }
   if (interactive) show('');
 }
 
-async function answer(text: string, count: number, options: TerminalOptions): Promise<Said[]> {
-  const { handle, state, say, now, language, report, audit } = options;
-  const message: IncomingMessage = {
-    cellar: 'terminal',
-    chat: 'terminal',
-    person: 'terminal',
-    id: String(count),
-    at: now(),
-    language,
-    content: { kind: 'text', text },
-  };
-  try {
-    const { writes, replies, answers } = handle(message, await state.load(message));
-    const said = replies.map(say);
-    await state.commit(writes);
-    audit?.(answers);
-    return said;
-  } catch (error) {
-    report(error);
-    return [say(faultReply(language))];
-  }
+async function answer(text: string, id: string, options: TerminalOptions): Promise<readonly Said[]> {
+  const { serve, now, language, name, audit } = options;
+  const content = { kind: 'text', text } as const;
+  const who = { ...AT_TERMINAL, ...(name !== undefined && { name }) };
+  const message: IncomingMessage = { ...who, id, at: now(), language, content };
+  const { said, answers } = await serve(message);
+  audit?.(answers);
+  return said;
 }
 
 /** The text, and under it the buttons that a number presses; choices with letters stand in the text already. */
