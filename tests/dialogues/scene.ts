@@ -5,6 +5,7 @@ import { DEFAULT_SETTINGS, type Settings } from '../../src/chat/conversation/set
 import { makeSay, type Said } from '../../src/chat/replies/say.ts';
 import { loadLocales } from '../../src/edge/locales.ts';
 import { isLanguage } from '../../src/edge/languages.ts';
+import { makeServeDue } from '../../src/edge/serve-due.ts';
 import { makeServe, type Serve } from '../../src/edge/serve-message.ts';
 import { createMemoryCellars } from '../../src/edge/store/memory-cellars.ts';
 
@@ -95,10 +96,26 @@ export interface Playing {
   readonly tick?: (store: CellarStore, now: number) => Promise<readonly SaidUnasked[]>;
 }
 
+/** Says all that is due, as the program does in the background. */
+function makeTick(settings: Settings): NonNullable<Playing['tick']> {
+  return async (store, now) => {
+    const serveDue = makeServeDue({ say, store, settings });
+    const sent: SaidUnasked[] = [];
+    for (;;) {
+      const taken = await store.takeDue(now, { lease_ms: 60_000, most: 50 });
+      if (taken.length === 0) return sent;
+      for (const due of taken) {
+        const { chat, said } = await serveDue(due, now);
+        sent.push(...said.map((one) => ({ chat, said: one })));
+      }
+    }
+  };
+}
+
 /** Plays a scene with a store in memory; gives what we answered to each move. */
 export async function play(
   { moves }: Scene,
-  { settings = DEFAULT_SETTINGS, tick = async () => [] }: Playing = {},
+  { settings = DEFAULT_SETTINGS, tick = makeTick(settings) }: Playing = {},
 ): Promise<string[][]> {
   let at = START;
   const store = createMemoryCellars({ now: () => at });

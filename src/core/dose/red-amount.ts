@@ -10,16 +10,23 @@ const measureValues = (measure: Measure | undefined, prefix = ''): Record<string
     ? {}
     : { [`${prefix}measure_value`]: measure.value, [`${prefix}measure_unit`]: measure.unit };
 
-const isColourOpen = ({ style, category, product, targetStated, target, ph }: DoseRequest): boolean =>
-  style === undefined &&
-  category === undefined &&
-  product === undefined &&
-  !targetStated &&
-  target !== undefined &&
-  'molecular_mg_L' in target &&
-  target.molecular_mg_L > RED_TARGET_MOLECULAR_mg_L &&
-  ph !== undefined &&
-  ph > STYLE_MATTERS_ABOVE_PH;
+/** What the cellar aims at in a red, or what is usual; mg/L molecular. */
+const redTargetOf = ({ red_target_mg_L = RED_TARGET_MOLECULAR_mg_L }: DoseRequest): number => red_target_mg_L;
+
+const isColourOpen = (request: DoseRequest): boolean => {
+  const { style, category, product, targetStated, target, ph } = request;
+  return (
+    style === undefined &&
+    category === undefined &&
+    product === undefined &&
+    !targetStated &&
+    target !== undefined &&
+    'molecular_mg_L' in target &&
+    target.molecular_mg_L > redTargetOf(request) &&
+    ph !== undefined &&
+    ph > STYLE_MATTERS_ABOVE_PH
+  );
+};
 
 /**
  * Above pH 3.5 a colour that nobody named makes a difference: what the same wine needs as a red (0.6 mg/L molecular).
@@ -39,7 +46,7 @@ const isColourOpen = ({ style, category, product, targetStated, target, ph }: Do
  */
 export function redAmountWarnings(request: DoseRequest, pK: number, room: RoomToLimit): readonly Warning[] {
   if (!isColourOpen(request)) return [];
-  const aim = aimAt({ molecular_mg_L: RED_TARGET_MOLECULAR_mg_L }, request, pK);
+  const aim = aimAt({ molecular_mg_L: redTargetOf(request) }, request, pK);
   const values: Record<string, number | string> = { style: 'red', ...aim };
   const dose_mg_L = aim.dose_mg_L ?? 0;
   const { limit } = room.found;

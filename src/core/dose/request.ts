@@ -35,6 +35,8 @@ export interface DoseRequest extends WineFacts {
   /** Share of the addition that is lost: 1/3 for ÷ (1 − 1/3). */
   readonly binding_share?: number;
   readonly basis: Basis;
+  /** What is aimed at in a red, mg/L molecular, where the cellar has its own; it is told where no colour is. */
+  readonly red_target_mg_L?: number;
 }
 
 /** How much additive went or would go in; exactly one of the amounts is present. */
