@@ -827,6 +827,7 @@ entry-correction =
         [sampled-before] sampled before the addition
        *[other] { $reason }
     }
+round-volume-which = { $vessel }: { $said } does not fit what it held: send it alone.
 sheet-entry =
     { $entry } · { $when } · { $list } · { $who }{ $late ->
         [late] { " " }(noted { $noted })
@@ -848,7 +849,11 @@ history-empty =
 history-more = Older ones: export { $vessel }
 list-more = … and { $count } more.
 vessels-none = I know no vessel yet. Send a reading, like: T4 1450 gal pH 3.58 free 21
-vessels-head = { $count } vessels, { $due } to measure now:
+vessels-head =
+    { $number ->
+        [one] One vessel, { $due } to measure now:
+       *[many] { $count } vessels, { $due } to measure now:
+    }
 vessels-line =
     { $vessel }{ $lot ->
         [none] { "" }
@@ -887,9 +892,9 @@ vessel-addition =
        *[landed] { "" }
     }
 vessel-bound =
-    { $count ->
-        [1] Bound: { $share } % of one addition.
-       *[other] Bound: { $share } % on average of { $count } additions ({ $least }–{ $most } %).
+    { $number ->
+        [one] Bound: { $share } % of one addition.
+       *[many] Bound: { $share } % on average of { $count } additions ({ $least }–{ $most } %).
     }
 vessel-order = Open order { $entry }: { $list } ({ $who }, { $when }).
 vessel-check =
@@ -905,9 +910,9 @@ vessel-check-due =
 vessel-unwatched = No checks. Again: watch it
 due-none = Nothing is due.
 due-head =
-    { $count ->
-        [1] One vessel to measure:
-       *[other] { $count } vessels to measure, the most urgent first:
+    { $number ->
+        [one] One vessel to measure:
+       *[many] { $count } vessels to measure, the most urgent first:
     }
 due-stage =
     { $stage ->
@@ -915,9 +920,9 @@ due-stage =
        *[other] { " " }(not over yet: no dose)
     }
 due-overdue =
-    { $days ->
-        [0] { "" }
-       *[other] , { $days } d overdue
+    { $overdue ->
+        [no] { "" }
+       *[yes] , { $days } d overdue
     }
 due-landing = { $vessel }: addition of { $added }, not measured since{ due-overdue }{ due-stage }
 due-usual =
@@ -937,9 +942,9 @@ daily-head = Good morning.
 remind = A day ago: { $list }. Measure free SO2 now.
 open-none = No open orders.
 open-head =
-    { $count ->
-        [1] One open order:
-       *[other] { $count } open orders:
+    { $number ->
+        [one] One open order:
+       *[many] { $count } open orders:
     }
 open-line = { $entry } · { $vessel } { $list } · { $who }, { $when }
 settings-head = Settings of this cellar, and how to change them:

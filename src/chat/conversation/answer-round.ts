@@ -66,7 +66,12 @@ export function answerRound(understood: Understood, here: Here): Handled {
       ...keeping(here, next),
     ],
     replies,
-    understood: { ...understood, readings },
+    understood: {
+      ...understood,
+      readings: said.map(({ reading, outcome }) =>
+        outcome.isLanding ? { ...reading, intent: 'reading' } : reading,
+      ),
+    },
     answers: said.map(({ outcome }) => outcome.answer),
   };
 }

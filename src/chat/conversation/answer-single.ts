@@ -62,7 +62,10 @@ export function answerSingle(
       ...keeping(here, next),
     ],
     replies: [reply],
-    understood: { ...understood, readings: [reading] },
+    understood: {
+      ...understood,
+      readings: [outcome.isLanding ? { ...reading, intent: 'reading' } : reading],
+    },
     answers: [outcome.answer],
   };
 }

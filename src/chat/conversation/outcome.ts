@@ -36,6 +36,8 @@ export interface Outcome {
   readonly askedTarget?: true;
   /** The additive whose cautions the reply has in full. */
   readonly cautioned?: AdditiveId;
+  /** It is the first reading after an addition: it shows where that landed. */
+  readonly isLanding?: true;
   /** What the log notes of it. */
   readonly notes?: readonly Note[];
   /** What else is kept of it. */

@@ -139,13 +139,13 @@ export interface SentenceValues {
   'dosed-sampled-before': 'known' | 'list' | 'next' | 'vessel' | 'when' | 'who';
   'dosed-which-first': 'known' | 'list' | 'vessel' | 'when' | 'who';
   'dosed-who': 'who';
-  'due-head': 'count';
-  'due-landing': 'added' | 'days' | 'stage' | 'vessel';
+  'due-head': 'count' | 'number';
+  'due-landing': 'added' | 'days' | 'overdue' | 'stage' | 'vessel';
   'due-none': never;
-  'due-often': 'day' | 'days' | 'free' | 'low' | 'stage' | 'vessel';
-  'due-overdue': 'days';
+  'due-often': 'day' | 'days' | 'free' | 'low' | 'overdue' | 'stage' | 'vessel';
+  'due-overdue': 'days' | 'overdue';
   'due-stage': 'stage';
-  'due-usual': 'day' | 'days' | 'free' | 'stage' | 'vessel';
+  'due-usual': 'day' | 'days' | 'free' | 'overdue' | 'stage' | 'vessel';
   'effect-allowance': 'after' | 'covers' | 'factor' | 'percent' | 'range' | 'third' | 'unit';
   'effect-allowance-bare': 'covers' | 'factor' | 'percent' | 'third';
   'effect-land': 'after' | 'range' | 'unit';
@@ -317,7 +317,7 @@ export interface SentenceValues {
   'of-each': 'count';
   'old-button': never;
   'on-it': 'vessel' | 'when' | 'who';
-  'open-head': 'count';
+  'open-head': 'count' | 'number';
   'open-line': 'entry' | 'list' | 'vessel' | 'when' | 'who';
   'open-none': never;
   option: 'list' | 'mark';
@@ -385,6 +385,7 @@ export interface SentenceValues {
   'round-strength': 'size';
   'round-tablet': 'tablet';
   'round-target-stage': 'vessel';
+  'round-volume-which': 'said' | 'vessel';
   'safety-head': 'additive';
   'salt-name': 'named';
   'set-aside': 'list';
@@ -463,7 +464,7 @@ export interface SentenceValues {
   'usual-strength': 'named';
   'vessel-addition': 'added' | 'entry' | 'landed' | 'list' | 'when' | 'who';
   'vessel-bare': 'vessel';
-  'vessel-bound': 'count' | 'least' | 'most' | 'share';
+  'vessel-bound': 'count' | 'least' | 'most' | 'number' | 'share';
   'vessel-check': 'when' | 'why';
   'vessel-check-due': 'when' | 'why';
   'vessel-empty': 'day' | 'vessel';
@@ -473,7 +474,7 @@ export interface SentenceValues {
   'vessel-unknown': 'vessel';
   'vessel-unwatched': never;
   'vessel-void': 'day' | 'event' | 'field';
-  'vessels-head': 'count' | 'due';
+  'vessels-head': 'count' | 'due' | 'number';
   'vessels-line': 'check' | 'day' | 'free' | 'lot' | 'next' | 'vessel';
   'vessels-none': never;
   'warning-addition-large': 'dose_mg_L' | 'unit';

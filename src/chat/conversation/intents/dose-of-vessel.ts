@@ -21,8 +21,15 @@ export function answerDoseOfVessel(reading: Reading, turn: Turn): Outcome {
   const dosed = dosedAlready(reading, turn);
   if (dosed) return dosed;
   const outcome = answerDose(reading, turn);
-  const news = [...landedAt(reading, turn), ...onItLines(reading, turn.here)];
-  return { ...outcome, lines: afterFirst(outcome.lines, news), keeps: planOf(reading, outcome, turn) };
+  const landed = landedAt(reading, turn);
+  const news = [...landed, ...onItLines(reading, turn.here)];
+  const isLanding = landed.length > 0 && saidFields(reading).target === undefined;
+  return {
+    ...outcome,
+    lines: afterFirst(outcome.lines, news),
+    keeps: planOf(reading, outcome, turn),
+    ...(isLanding && { isLanding: true as const }),
+  };
 }
 
 /** What has to be seen stands right under the answer. */

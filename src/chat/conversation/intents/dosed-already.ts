@@ -98,5 +98,6 @@ function landedToday(reading: Reading, dosed: Dosed, free_mg_L: number, turn: Tu
     inRound: lines.slice(0, 1),
     lines: [...lines, ...factLines(reading, manner)],
     buttons: buttonsFor(turn.ref, ['gd']),
+    ...(landing && { isLanding: true as const }),
   };
 }

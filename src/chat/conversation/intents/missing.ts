@@ -1,8 +1,7 @@
 import type { Reading } from '../../reader/understood.ts';
+import { missingInRound } from '../lines/missing-in-round.ts';
 import { assumedLines } from '../lines/assumed.ts';
 import { factLines } from '../lines/facts.ts';
-import { line } from '../lines/line.ts';
-import { vesselText } from '../lines/vessel.ts';
 import type { Outcome, Turn } from '../outcome.ts';
 import { asking } from './asking.ts';
 
@@ -11,9 +10,7 @@ export function missing(reading: Reading, turn: Turn): Outcome {
   const { question, buttons, waits } = asking(reading, turn, 'first');
   return {
     answer: null,
-    inRound: [
-      line('first', 'round-missing', { vessel: vesselText(reading), field: reading.asks[0] ?? 'none' }),
-    ],
+    inRound: [missingInRound(reading, turn.manner)],
     lines: [...question, ...factLines(reading, turn.manner), ...assumedLines(reading, turn.manner)],
     buttons,
     ...(waits !== undefined && { waits }),

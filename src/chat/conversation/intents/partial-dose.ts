@@ -2,13 +2,13 @@ import type { DoseAnswer } from '../../../core/dose/answer.ts';
 import type { DoseRequest } from '../../../core/dose/request.ts';
 import type { Reading } from '../../reader/understood.ts';
 import type { Line } from '../../replies/reply.ts';
+import { missingInRound } from '../lines/missing-in-round.ts';
 import { assumedLines } from '../lines/assumed.ts';
 import { factLines } from '../lines/facts.ts';
 import { basisLines } from '../lines/basis.ts';
 import { bottledLines } from '../lines/bottled.ts';
 import { line } from '../lines/line.ts';
 import { knownSoFar } from '../lines/known-so-far.ts';
-import { vesselText } from '../lines/vessel.ts';
 import { underLines, warningLines } from '../lines/warnings.ts';
 import type { Outcome, Turn } from '../outcome.ts';
 import { asking } from './asking.ts';
@@ -24,9 +24,7 @@ export function partialDose(reading: Reading, request: DoseRequest, answer: Dose
   const { question, buttons, waits } = asking(reading, turn, says ? 'question' : 'first');
   return {
     answer: says ? answer : null,
-    inRound: [
-      line('first', 'round-missing', { vessel: vesselText(reading), field: reading.asks[0] ?? 'none' }),
-    ],
+    inRound: [missingInRound(reading, manner)],
     lines: [
       ...(says ? [...bottledLines(reading), ...known.slice(0, 1), ...under, ...known.slice(1)] : question),
       ...condition,

@@ -21,6 +21,7 @@ export function dueLine(
     day: free_mg_L === undefined ? '' : dayText(free_mg_L.at, telling),
     added: last === undefined ? '' : momentText(last.at, telling),
     days: String(overdue_days),
+    overdue: overdue_days === 0 ? 'no' : 'yes',
     low: check.is_low ? 'low' : 'none',
     stage: check.urges_dose ? 'none' : (vessel.traits.stage?.value ?? 'none'),
   });

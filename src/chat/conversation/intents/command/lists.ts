@@ -35,7 +35,7 @@ export async function listVessels(here: Here, view: CellarView): Promise<Handled
   const watched = [...overdue, ...coming].map(({ vessel }) => vessel);
   const rest = vessels.filter((vessel) => !watched.includes(vessel));
   const rows = [...watched, ...rest].map((vessel) => vesselLine(vessel, here));
-  const head = line('first', 'vessels-head', { count: String(vessels.length), due: String(overdue.length) });
+  const head = line('first', 'vessels-head', { ...countOf(vessels.length), due: String(overdue.length) });
   return replying(here, { lines: [head, ...shortened(rows)] });
 }
 
@@ -75,10 +75,7 @@ export function dueLines(
   due: readonly DueVessel[],
   here: Pick<Here, 'settings' | 'message' | 'memory'>,
 ): Line[] {
-  return [
-    line('first', 'due-head', { count: String(due.length) }),
-    ...shortened(due.map((one) => dueLine(one, here))),
-  ];
+  return [line('first', 'due-head', countOf(due.length)), ...shortened(due.map((one) => dueLine(one, here)))];
 }
 
 /** The orders that nobody has confirmed yet, with a button for each of the first. */
@@ -105,9 +102,14 @@ export async function listOrders(here: Here, view: CellarView): Promise<Handled>
     .flatMap((entry): Button[] => entryButtons(entry, ['d']))
     .map((button, at) => ({ ...button, mark: String(at + 1) }));
   return replying(here, {
-    lines: [line('first', 'open-head', { count: String(open.length) }), ...shortened(rows)],
+    lines: [line('first', 'open-head', countOf(open.length)), ...shortened(rows)],
     buttons,
   });
+}
+
+/** A count as text, and whether the words after it are of one or of many. */
+function countOf(count: number): Record<'count' | 'number', string> {
+  return { count: String(count), number: count === 1 ? 'one' : 'many' };
 }
 
 /** What has no room is counted. */

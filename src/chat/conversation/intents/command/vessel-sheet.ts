@@ -117,6 +117,7 @@ function boundLines({ landings }: Vessel, here: Here): Line[] {
   return [
     line('first', 'vessel-bound', {
       count: String(shares.length),
+      number: shares.length === 1 ? 'one' : 'many',
       share: percent(mean),
       least: percent(Math.min(...shares)),
       most: percent(Math.max(...shares)),
