@@ -36,9 +36,11 @@ function isSame(value: unknown, cell: unknown, name: string, writing: Writing): 
   if (['at', 'noted_at', 'until'].includes(name)) return Date.parse(String(cell)) === value;
   if (typeof value === 'number') return numberIn(cell, writing) === value;
   if (typeof value === 'boolean') return cell === (value ? 'yes' : 'no');
-  const text = Array.isArray(value)
-    ? value.map((one) => String(one).replaceAll('\\', '\\\\').replaceAll(',', '\\,')).join(', ')
-    : String(value);
+  const parts = (Array.isArray(value) ? value : []).map(String);
+  const text =
+    typeof value === 'string'
+      ? value
+      : parts.map((one) => one.replaceAll('\\', '\\\\').replaceAll(',', '\\,')).join(', ');
   return cell === (writing.apostrophe && MAY_RECKON.test(text) ? `'${text}` : text);
 }
 

@@ -1,27 +1,30 @@
 import { makeSay } from '../../../src/chat/replies/say.ts';
+import type { Person } from '../../../src/core/cellar/cellar-store.ts';
+import type { LoggedEntry } from '../../../src/core/cellar/entry.ts';
+import { sayExportWords } from '../../../src/edge/files/say-export-words.ts';
+import { writeGiven } from '../../../src/edge/files/write-given.ts';
 import { loadLocales } from '../../../src/edge/locales.ts';
-import { makeExport } from '../../../src/edge/files/make-export.ts';
-import type { ExportFile, ExportRequest } from '../../../src/edge/files/make-export.ts';
 import { PEOPLE } from '../../chat/attachments/any-log.ts';
 
-const say = makeSay(loadLocales());
+/** The sentences as the program says them. */
+export const say = makeSay(loadLocales());
 
-/** An export of some entries, with the usual of everything that is not said. */
+/** How an export is wanted, where it is not the usual. */
+export interface Wanted {
+  readonly format?: 'csv' | 'xlsx';
+  readonly decimalMark?: '.' | ',';
+  readonly people?: readonly Person[];
+}
+
+/** The bytes of an export of some entries, made here and not in a thread of its own. */
 export function exportOf(
-  entries: ExportRequest['entries'],
-  more: Partial<ExportRequest> = {},
-): Promise<ExportFile> {
-  return makeExport(
-    {
-      entries,
-      people: PEOPLE,
-      span: {},
-      format: 'csv',
-      zone: 'Europe/Madrid',
-      decimalMark: '.',
-      language: 'en',
-      ...more,
-    },
+  entries: readonly LoggedEntry[],
+  { format = 'csv', decimalMark = '.', people = PEOPLE }: Wanted = {},
+): Promise<Uint8Array> {
+  const words = sayExportWords(
     say,
+    'en',
+    entries.map(({ by }) => by),
   );
+  return writeGiven({ source: { entries, people, zone: 'Europe/Madrid', words }, format, decimalMark });
 }

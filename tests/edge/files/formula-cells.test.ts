@@ -92,7 +92,7 @@ test('a formula in a remark, a name, a lot or a vessel stays text in an export',
     remark: '+r',
     mass_g: 1,
   };
-  const { bytes } = await exportOf([entry]);
+  const bytes = await exportOf([entry]);
   const { data } = Papa.parse<string[]>(new TextDecoder().decode(bytes), { delimiter: ',', newline: '\r\n' });
   const begun = data.flat().filter((cell) => /^[=+\-@\t\r]/.test(cell));
   expect(begun).toEqual([]);

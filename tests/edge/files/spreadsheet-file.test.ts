@@ -12,7 +12,7 @@ const LOG: Entry[] = [
 ];
 
 async function partsOf(): Promise<(name: string) => string> {
-  const { bytes } = await exportOf(struckIn(LOG), { format: 'xlsx' });
+  const bytes = await exportOf(struckIn(LOG), { format: 'xlsx' });
   const parts = unzipSync(bytes);
   return (name) => new TextDecoder().decode(parts[name]);
 }
