@@ -1066,7 +1066,7 @@ export-tablet_salt_g = Salt in a tablet g
 export-key = Key
 
 import-vessels = Vessels in the file: { $vessels }.
-import-log = In the file: { $entries } entries, { $vessels } vessels, { $people } people.
+import-log = Entries in the file: { $entries }. Vessels: { $vessels }. People: { $people }.
 import-not-understood = Not understood and left out: { $count ->
         [one] line { $lines }
        *[other] lines { $lines }
