@@ -1,7 +1,8 @@
-import type { StatePort } from '../../chat/conversation/ports.ts';
+import type { Audit } from '../audit-workings.ts';
 import type { Clock } from '../clock.ts';
 import type { Log } from '../logging.ts';
-import { answerArrival, type Conversation } from './answer-arrival.ts';
+import type { Serve } from '../serve-message.ts';
+import { answerArrival } from './answer-arrival.ts';
 import { createBackOff } from './back-off.ts';
 import { createChatQueues } from './chat-queues.ts';
 import { confirmOffset } from './confirm-offset.ts';
@@ -13,8 +14,10 @@ import { toMessage } from './to-message.ts';
 import type { TelegramUpdate } from './update.ts';
 
 /** Everything that serving Telegram needs, handed in. */
-export interface TelegramOptions extends Conversation {
-  readonly state: StatePort;
+export interface TelegramOptions {
+  readonly serve: Serve;
+  /** Checks the workings once their replies are sent. */
+  readonly audit?: Audit;
   readonly log: Log;
   readonly clock: Clock;
   readonly config: { readonly botToken: string; readonly botApiRoot: string };

@@ -3,6 +3,7 @@ import { z } from 'zod';
 const User = z.looseObject({
   id: z.int(),
   is_bot: z.boolean().optional(),
+  first_name: z.string().optional(),
   language_code: z.string().optional(),
 });
 

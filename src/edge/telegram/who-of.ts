@@ -1,4 +1,5 @@
 import type { Who } from '../../chat/conversation/ports.ts';
+import { shownName } from '../shown-name.ts';
 import type { TelegramChat, TelegramUser } from './update.ts';
 
 /** Whether the bot speaks in this chat at all: in private chats only, it stays silent elsewhere. */
@@ -9,5 +10,11 @@ export const cellarOf = (chatId: number): string => `telegram:${chatId}`;
 
 /** The names by which the conversation knows a chat and a person, unlike those of any other platform. */
 export function whoOf(chat: TelegramChat, from: TelegramUser): Who {
-  return { cellar: cellarOf(chat.id), chat: `telegram:${chat.id}`, person: `telegram:${from.id}` };
+  const name = shownName(from.first_name);
+  return {
+    cellar: cellarOf(chat.id),
+    chat: `telegram:${chat.id}`,
+    person: `telegram:${from.id}`,
+    ...(name !== undefined && { name }),
+  };
 }

@@ -1,9 +1,11 @@
 import { describe, expect, test } from 'vitest';
 
-import { createMemoryStore } from '../../../src/edge/store/memory.ts';
+import { createMemoryCellars } from '../../../src/edge/store/memory-cellars.ts';
+import { StoreError } from '../../../src/edge/store/store-error.ts';
 import { Person } from './person.ts';
 import type { Fault } from './fake-bot-api.ts';
 import { openScene } from './scene.ts';
+import { hastyClock } from './served-bot.ts';
 
 describe('what goes wrong in one chat', () => {
   test('stays there: a blocked bot says nothing more to that person', async () => {
@@ -50,16 +52,23 @@ describe('what goes wrong in one chat', () => {
   test('no answer is sent when what has to be kept could not be kept, only that it failed', async () => {
     await using scene = await openScene();
     const { rosa, serve } = scene;
-    const store = createMemoryStore();
+    const store = createMemoryCellars({ now: hastyClock.now });
+    const disk = new StoreError('full', { cause: new Error('the disk is full') });
     let full = true;
-    serve({
-      state: {
-        load: (who) => store.load(who),
-        commit: (writes) => (full ? Promise.reject(new Error('the disk is full')) : store.commit(writes)),
+    const bot = serve({
+      store: {
+        ...store,
+        turn: (cellar, work) =>
+          store.turn(cellar, async (view) => {
+            const done = await work(view);
+            if (full) throw disk;
+            return done;
+          }),
       },
     });
     rosa.sends('first');
-    expect(await rosa.reads(1)).toBe('fault');
+    expect(await rosa.reads(1)).toBe('fault-unwritten');
+    expect(bot.logged.join('')).toContain('the disk is full');
     full = false;
     rosa.sends('second');
     expect(await rosa.reads(2)).toBe('1: second');

@@ -1,16 +1,15 @@
 import { assert } from 'vitest';
 
-import type { TelegramOptions } from '../../../src/edge/telegram/serve-telegram.ts';
 import { FakeBotApi, TOKEN } from './fake-bot-api.ts';
 import { Person } from './person.ts';
-import { serveBot, type ServedBot } from './served-bot.ts';
+import { serveBot, type BotChanges, type ServedBot } from './served-bot.ts';
 
 /** A fake platform, somebody with a phone, and bots. */
 export interface Scene extends AsyncDisposable {
   readonly api: FakeBotApi;
   readonly rosa: Person;
   /** Starts a bot on the platform; it is stopped when the scene is over. */
-  readonly serve: (changes?: Partial<TelegramOptions>) => ServedBot;
+  readonly serve: (changes?: BotChanges) => ServedBot;
 }
 
 /**

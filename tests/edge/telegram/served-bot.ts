@@ -1,4 +1,6 @@
-import { createMemoryStore } from '../../../src/edge/store/memory.ts';
+import { DEFAULT_SETTINGS } from '../../../src/chat/conversation/settings.ts';
+import { makeServe, type Serving } from '../../../src/edge/serve-message.ts';
+import { createMemoryCellars } from '../../../src/edge/store/memory-cellars.ts';
 import { createLog } from '../../../src/edge/logging.ts';
 import { systemClock, type Clock } from '../../../src/edge/clock.ts';
 import { serveTelegram, type TelegramOptions } from '../../../src/edge/telegram/serve-telegram.ts';
@@ -23,20 +25,30 @@ export interface ServedBot {
   readonly ended: Promise<void>;
 }
 
-/** Serves the fake platform at `root` with the stub conversation, unless another is handed in. */
-export function serveBot(root: string, changes: Partial<TelegramOptions> = {}): ServedBot {
+/** What a bot may be served with in place of the usual. */
+export type BotChanges = Partial<TelegramOptions & Pick<Serving, 'handle' | 'say' | 'store'>>;
+
+/** Serves the fake platform at `root` with the stub conversation and a store in memory, unless others are handed in. */
+export function serveBot(root: string, changes: BotChanges = {}): ServedBot {
   const told: string[] = [];
   const logged: string[] = [];
   const stopping = new AbortController();
+  const log = createLog({ level: 'trace', secret: TOKEN, to: { write: (line) => void logged.push(line) } });
+  const {
+    handle = stub.handle,
+    say = stub.say,
+    store = createMemoryCellars({ now: hastyClock.now }),
+    ...others
+  } = changes;
+  const report = (err: unknown): void => log.error({ err }, 'a message could not be answered');
   const ended = serveTelegram({
-    ...stub,
-    state: createMemoryStore(),
-    log: createLog({ level: 'trace', secret: TOKEN, to: { write: (line) => void logged.push(line) } }),
+    serve: makeServe({ handle, say, store, settings: DEFAULT_SETTINGS, report }),
+    log,
     clock: hastyClock,
     config: { botToken: TOKEN, botApiRoot: root },
     tell: (sentence) => void told.push(sentence),
     signal: stopping.signal,
-    ...changes,
+    ...others,
     // Long on the hasty clock, so that only the tests that want them see them end.
     times: { callTimeout_s: 20, watchdog_s: 1e6, finish_s: 1e4, confirm_s: 1e4, ...changes.times },
   });

@@ -1,8 +1,10 @@
 import { expect, test } from 'vitest';
 
 import type { IncomingMessage } from '../../../src/chat/conversation/ports.ts';
+import { DEFAULT_SETTINGS } from '../../../src/chat/conversation/settings.ts';
 import { createLog } from '../../../src/edge/logging.ts';
-import { createMemoryStore } from '../../../src/edge/store/memory.ts';
+import { makeServe } from '../../../src/edge/serve-message.ts';
+import { createMemoryCellars } from '../../../src/edge/store/memory-cellars.ts';
 import { answerArrival } from '../../../src/edge/telegram/answer-arrival.ts';
 import type { Platform } from '../../../src/edge/telegram/platform.ts';
 import { handle, say } from './stub-conversation.ts';
@@ -23,13 +25,15 @@ test('an answer waits one second for its tap to be acknowledged, and no longer',
     language: 'en',
     content: { kind: 'press', key: 'w:1' },
   };
+  const store = createMemoryCellars({ now: () => 0 });
+  const fail = (fault: unknown): never => {
+    throw fault;
+  };
   const done = await answerArrival(
     { updateId: 1, chatId: 1, tapId: 'tap', message },
     {
-      handle,
-      say,
+      serve: makeServe({ handle, say, store, settings: DEFAULT_SETTINGS, report: fail }),
       platform,
-      state: createMemoryStore(),
       clock: { now: () => 0, wait: async (ms) => void waits_s.push(ms / 1000) },
       log: createLog({ level: 'silent', to: { write: () => undefined } }),
       signal: new AbortController().signal,

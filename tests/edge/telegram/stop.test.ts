@@ -41,9 +41,9 @@ describe('a stop', () => {
     const handled: string[] = [];
     const bot = serve({
       times: { finish_s: 50 },
-      handle: (message, memory) => {
+      handle: (message, ...rest) => {
         handled.push(message.id);
-        return handle(message, memory);
+        return handle(message, ...rest);
       },
     });
     rosa.sends('first');

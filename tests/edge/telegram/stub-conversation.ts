@@ -1,31 +1,28 @@
-import type { Handled, IncomingMessage } from '../../../src/chat/conversation/ports.ts';
-import type { Memory } from '../../../src/chat/conversation/memory.ts';
+import type { Handle } from '../../../src/chat/conversation/ports.ts';
 import type { Reply } from '../../../src/chat/replies/reply.ts';
 import type { Said } from '../../../src/chat/replies/say.ts';
 
 /** Answers each message with its count in this conversation and what it was; `two` brings two replies. */
-export function handle(message: IncomingMessage, memory: Memory): Handled {
-  const { content, language } = message;
+export const handle: Handle = async ({ content, language, chat }, view) => {
   const words =
     content.kind === 'text'
       ? content.text
       : content.kind === 'press'
         ? `pressed ${content.key}`
         : `a ${content.what}`;
-  const nextNumber = memory.nextNumber + 1;
-  const { cellar, chat, person } = message;
+  const count = Number((await view.kept(chat)) ?? 0) + 1;
   const reply = (text: string): Reply => ({
     language,
     lines: [{ room: 'first', key: 'echo', values: { text } }],
-    buttons: [{ key: `again:${memory.nextNumber}`, mark: '1', label: 'again', values: {} }],
+    buttons: [{ key: `again:${count}`, mark: '1', label: 'again', values: {} }],
   });
   if (words === 'throw') throw new Error('a planted fault');
-  const echo = `${memory.nextNumber}: ${words}`;
+  const echo = `${count}: ${words}`;
   return {
-    writes: [{ kind: 'memory', who: { cellar, chat, person }, memory: { ...memory, nextNumber } }],
+    writes: [{ kind: 'keep', key: chat, text: String(count) }],
     replies: words === 'two' ? [reply(echo), reply('and more')] : [reply(echo)],
   };
-}
+};
 
 /** Says such a reply. */
 export function say({ lines, buttons }: Reply): Said {

@@ -9,7 +9,7 @@ const NOW = 1_767_000_100_000;
 const FROM = { id: 7001, is_bot: false, first_name: 'Rosa', language_code: 'pt-BR' };
 const CHAT = { id: 7001, type: 'private', first_name: 'Rosa' };
 const MESSAGE = { message_id: 12, date: 1_767_000_000, chat: CHAT, from: FROM };
-const WHO = { cellar: 'telegram:7001', chat: 'telegram:7001', person: 'telegram:7001' };
+const WHO = { cellar: 'telegram:7001', chat: 'telegram:7001', person: 'telegram:7001', name: 'Rosa' };
 
 const arrive = (content: object): ReturnType<typeof toMessage> => {
   const [update] = readUpdates([{ update_id: 900, ...content }]);

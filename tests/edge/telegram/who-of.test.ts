@@ -3,8 +3,12 @@ import { expect, test } from 'vitest';
 import { isServed, whoOf } from '../../../src/edge/telegram/who-of.ts';
 
 test('a chat and the person in it have names of their own, and each chat is a cellar', () => {
-  const who = whoOf({ id: -100, type: 'group' }, { id: 7 });
-  expect(who).toEqual({ cellar: 'telegram:-100', chat: 'telegram:-100', person: 'telegram:7' });
+  const who = { cellar: 'telegram:-100', chat: 'telegram:-100', person: 'telegram:7' };
+  expect(whoOf({ id: -100, type: 'group' }, { id: 7, first_name: ' Rosa ' })).toEqual({
+    ...who,
+    name: 'Rosa',
+  });
+  expect(whoOf({ id: -100, type: 'group' }, { id: 7, first_name: ' ' })).toEqual(who);
 });
 
 test.each([
