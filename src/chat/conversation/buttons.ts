@@ -11,7 +11,7 @@ import { letterAt } from './waiting.ts';
 /** What a button does to a reading; its key is `does:ref`, of a choice `does:ref:which`. */
 export type Does =
   | 'w' | 's' | 't' | 'm' | 'nf' | 'red' | 'white' | 'c' | 'l'
-  | 'a' | 'y' | 'o' | 'n' | 'gb' | 'ga' | 'gd'; // prettier-ignore
+  | 'a' | 'y' | 'o' | 'n' | 'i' | 'gb' | 'ga' | 'gd'; // prettier-ignore
 
 /** What a button does to an entry of the log; its key is `does:entry`. */
 export type DoesToEntry = 'u' | 'd' | 'r';
@@ -25,6 +25,7 @@ export const LABELS = {
   y: 'button-mine',
   o: 'button-order',
   n: 'button-note',
+  i: 'button-take',
   gb: 'button-sampled-before',
   ga: 'button-sampled-after',
   gd: 'button-dose-anyway',
@@ -152,7 +153,9 @@ export interface Pressed {
 
 /** Takes a button's key apart; undefined for one that is of no reading, or that we never made. */
 export function parseKey(key: string): Pressed | undefined {
-  const match = /^(w|s|t|m|nf|red|white|c|l|a|y|o|n|gb|ga|gd):(\d{1,9}\.\d{1,9})(?::([a-z]|\d))?$/.exec(key);
+  const match = /^(w|s|t|m|nf|red|white|c|l|a|y|o|n|i|gb|ga|gd):(\d{1,9}\.\d{1,9})(?::([a-z]|\d))?$/.exec(
+    key,
+  );
   if (!match) return undefined;
   return { does: match[1] as Does, ref: match[2] ?? '', which: match[3] ?? '' };
 }

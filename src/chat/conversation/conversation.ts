@@ -1,9 +1,10 @@
 import type { CellarView } from '../../core/cellar/cellar-store.ts';
 import { scheduleDaily } from './daily.ts';
-import { arrive } from './here.ts';
+import { handleFile } from './handle-file.ts';
+import { arrive, type Here } from './here.ts';
 import { eventKey } from './keys.ts';
 import { greeting } from './note.ts';
-import type { IncomingMessage, Handled } from './ports.ts';
+import type { Content, IncomingMessage, Handled } from './ports.ts';
 import { handlePress } from './press.ts';
 import { alreadyNoted } from './press/log-buttons.ts';
 import { handleText } from './text.ts';
@@ -30,11 +31,23 @@ export async function handle(
   const fact = before.find(({ kind }) => kind !== 'reading' && kind !== 'vessel');
   if (fact) return alreadyNoted(fact, here);
   const done = { ...here, done: new Set(before.map(({ key }) => key)) };
-  const handled =
-    content.kind === 'text'
-      ? await handleText(content.text, done, view)
-      : await handlePress(content.key, done, view);
+  const handled = await handleContent(content, done, view);
   const notes = handled.writes.some(({ kind }) => kind === 'entry');
   const daily = notes ? await scheduleDaily(done, view) : [];
   return { ...handled, writes: [...greeting(done), ...handled.writes, ...daily] };
+}
+
+function handleContent(
+  content: Exclude<Content, { readonly kind: 'unreadable' }>,
+  here: Here,
+  view: CellarView,
+): Promise<Handled> {
+  switch (content.kind) {
+    case 'text':
+      return handleText(content.text, here, view);
+    case 'press':
+      return handlePress(content.key, here, view);
+    case 'file':
+      return handleFile(content.read, here, view);
+  }
 }

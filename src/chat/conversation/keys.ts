@@ -21,6 +21,11 @@ export function claimKey(vessel: string): string {
   return `claim ${vessel}`;
 }
 
+/** A file that was shown and may be taken. */
+export function importKey(ref: string): string {
+  return `import ${ref}`;
+}
+
 /** The last dose that was reckoned for a vessel. */
 export function planKey(vessel: string): string {
   return `plan ${vessel}`;

@@ -1,5 +1,6 @@
 import type { CellarView, Write } from '../../core/cellar/cellar-store.ts';
 import type { AddedAnswer, DoseAnswer, EffectAnswer, SolutionAnswer } from '../../core/dose/answer.ts';
+import type { ImportRead } from '../attachments/import-read.ts';
 import type { Language, Understood } from '../reader/understood.ts';
 import type { Reply } from '../replies/reply.ts';
 import type { Settings } from './settings.ts';
@@ -13,10 +14,11 @@ export interface Who {
   readonly name?: string;
 }
 
-/** What was sent: a text, the key of a button, or something that is not read. */
+/** What was sent: a text, the key of a button, a file as the edge has read it, or something that is not read. */
 export type Content =
   | { readonly kind: 'text'; readonly text: string }
   | { readonly kind: 'press'; readonly key: string }
+  | { readonly kind: 'file'; readonly read: ImportRead }
   | {
       readonly kind: 'unreadable';
       readonly what: 'edited' | 'photo' | 'sticker' | 'voice' | 'file' | 'other';

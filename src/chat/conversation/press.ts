@@ -7,6 +7,7 @@ import { answerSingle } from './answer-single.ts';
 import { parseEntryKey, parseKey, type Does } from './buttons.ts';
 import { checkFields } from './check-fields.ts';
 import { complete } from './complete.ts';
+import { takeImport } from './handle-file.ts';
 import { withVessels, type Here } from './here.ts';
 import { readingKey } from './keys.ts';
 import { line } from './lines/line.ts';
@@ -32,6 +33,7 @@ export async function handlePress(key: string, here: Here, view: CellarView): Pr
   const ofEntry = parseEntryKey(key);
   if (ofEntry) return pressEntry(ofEntry, here, view);
   const button = parseKey(key);
+  if (button?.does === 'i') return takeImport(button.ref, here, view);
   const kept = button && (await view.kept(readingKey(button.ref)));
   const found = kept === undefined ? undefined : (JSON.parse(kept) as Remembered);
   // A button is for those who see it.
@@ -54,7 +56,7 @@ export async function handlePress(key: string, here: Here, view: CellarView): Pr
 }
 
 function pressed(
-  does: Exclude<Does, 'a' | 'n' | 'o' | 'gb' | 'ga' | 'gd'>,
+  does: Exclude<Does, 'a' | 'n' | 'o' | 'i' | 'gb' | 'ga' | 'gd'>,
   which: string,
   found: Remembered,
   here: Here,

@@ -39,6 +39,7 @@ export interface SentenceValues {
   'assumed-target-red': 'kind' | 'value';
   'assumed-target-sweet': 'kind' | 'value';
   at: 'vessel';
+  'backup-written': 'path';
   'bare-amount': 'amount' | 'count' | 'unit';
   'basis-oiv': 'celsius' | 'pK' | 'percent';
   'basis-oiv-need': 'celsius' | 'free' | 'pK' | 'percent';
@@ -57,6 +58,7 @@ export interface SentenceValues {
   'button-safety': never;
   'button-sampled-after': never;
   'button-sampled-before': never;
+  'button-take': never;
   'button-target': never;
   'button-undo': 'entry';
   'button-white': never;
@@ -171,6 +173,7 @@ export interface SentenceValues {
   'entry-reading': 'list' | 'vessel';
   'entry-stock': 'text';
   'entry-vessel': 'event' | 'list' | 'lot' | 'to' | 'vessel' | 'whole';
+  'errand-failed': 'reason';
   'event-said': 'event' | 'lot' | 'to' | 'whole';
   'export-SO2_g': never;
   'export-added_mg_L': never;
@@ -197,6 +200,7 @@ export interface SentenceValues {
   'export-lot': never;
   'export-mass_g': never;
   'export-name': never;
+  'export-none': never;
   'export-noted': never;
   'export-noted_at': never;
   'export-order': never;
@@ -229,6 +233,7 @@ export interface SentenceValues {
   'export-volume_L': never;
   'export-wine': never;
   'export-wine-lot': never;
+  'export-written': 'path';
   'fact-alcohol': 'percent';
   'fact-allowance': 'percent';
   'fact-capacity': 'volume';
@@ -261,12 +266,15 @@ export interface SentenceValues {
   'history-empty': 'vessel';
   'history-head': 'vessel';
   'history-more': 'vessel';
+  'import-ask': never;
   'import-log': 'entries' | 'people' | 'vessels';
+  'import-no-file': 'file';
   'import-not-taken': 'list';
   'import-not-taken-name': 'name';
   'import-not-understood': 'count' | 'lines';
   'import-nothing-taken': never;
   'import-problem': 'about' | 'code' | 'lines';
+  'import-taken': 'entries';
   'import-unit': 'unit';
   'import-vessels': 'vessels';
   'in-all': 'count';
