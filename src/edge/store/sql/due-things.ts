@@ -1,31 +1,34 @@
-import type { Kysely } from 'kysely';
+import { sql, type Kysely } from 'kysely';
 import type { Due, TakenDue } from '../../../core/cellar/cellar-store.ts';
 import type { Tables } from './tables.ts';
+
+/** A literal: an index of some rows serves only a query that says so itself. */
+const UNSAID = sql.lit(0);
 
 const COLUMNS = ['id', 'chat', 'at', 'about'] as const;
 
 /** What is still to be said under that id. */
 export function readDue(db: Kysely<Tables>, cellar: string, id: string): Promise<Due | undefined> {
   const query = db.selectFrom('due').select(COLUMNS).where('cellar', '=', cellar).where('id', '=', id);
-  return query.where('said', '=', 0).executeTakeFirst();
+  return query.where('said', '=', UNSAID).executeTakeFirst();
 }
 
 /** What is still to be said in a cellar, the earliest first. */
 export function readAllDue(db: Kysely<Tables>, cellar: string): Promise<Due[]> {
-  const query = db.selectFrom('due').select(COLUMNS).where('cellar', '=', cellar).where('said', '=', 0);
+  const query = db.selectFrom('due').select(COLUMNS).where('cellar', '=', cellar).where('said', '=', UNSAID);
   return query.orderBy('at').orderBy('id').execute();
 }
 
 /** When the next thing of any cellar can be handed out. */
 export async function readNextDue(db: Kysely<Tables>): Promise<number | undefined> {
-  const query = db.selectFrom('due').select('open_at').where('said', '=', 0);
+  const query = db.selectFrom('due').select('open_at').where('said', '=', UNSAID);
   return (await query.orderBy('open_at').limit(1).executeTakeFirst())?.open_at;
 }
 
 /** What can be handed out by `now` in all cellars, the earliest first. */
 export function readOpenDue(db: Kysely<Tables>, now: number, most: number): Promise<TakenDue[]> {
   const query = db.selectFrom('due').select(['cellar', ...COLUMNS]);
-  const open = query.where('said', '=', 0).where('open_at', '<=', now);
+  const open = query.where('said', '=', UNSAID).where('open_at', '<=', now);
   return open.orderBy('open_at').orderBy('cellar').orderBy('id').limit(most).execute();
 }
 
@@ -49,7 +52,7 @@ export async function keepDue(db: Kysely<Tables>, cellar: string, due: Due): Pro
             .else(eb.ref('due.leased_until'))
             .end(),
         }))
-        .where('due.said', '=', 0),
+        .where('due.said', '=', UNSAID),
     )
     .execute();
 }

@@ -1,4 +1,4 @@
-import type { Kysely } from 'kysely';
+import { sql, type Kysely } from 'kysely';
 import type { EntryQuery } from '../../../core/cellar/cellar-store.ts';
 import type { LoggedEntry } from '../../../core/cellar/entry.ts';
 import { comparePoints } from '../projection/point.ts';
@@ -28,8 +28,8 @@ const selectLogged = (db: Kysely<Tables>, cellar: string) =>
 
 /** The number that the next entry gets. */
 export async function readNextEntry(db: Kysely<Tables>, cellar: string): Promise<number> {
-  const last = db.selectFrom('entry').select(({ fn }) => fn.max('entry').as('entry'));
-  const row = await last.where('cellar', '=', cellar).executeTakeFirst();
+  const last = db.selectFrom('entry').select('entry').where('cellar', '=', cellar);
+  const row = await last.orderBy('entry', 'desc').limit(1).executeTakeFirst();
   return (row?.entry ?? 0) + 1;
 }
 
@@ -75,7 +75,8 @@ export async function readLastEntryBy(
 ): Promise<LoggedEntry | undefined> {
   const row = await selectLogged(db, cellar)
     .where('entry.person', '=', person)
-    .where('entry.kind', '<>', 'correction')
+    // As a literal: an index of some rows serves only a query that says so itself.
+    .where('entry.kind', '<>', sql.lit('correction'))
     .where('struck.entry', 'is', null)
     .orderBy('entry.entry', 'desc')
     .limit(1)

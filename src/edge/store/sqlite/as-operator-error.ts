@@ -20,7 +20,8 @@ const SENTENCES: Record<StoreFault, (path: string, reason: string) => string> = 
 
 /** What the operator is told of a file that is damaged. */
 export function damagedSentence(path: string, reason: string): string {
-  return `${path} is damaged (${reason}). It is left as it is: move it away, with its -wal and -shm files, and put a backup in its place.`;
+  const oneLine = reason.replaceAll(/\*\*\*[^*]*\*\*\*|\s+/g, ' ').trim();
+  return `${path} is damaged (${oneLine}). It is left as it is: move it away, with its -wal and -shm files, and put a backup in its place.`;
 }
 
 /** The faults of `node:fs`. */

@@ -1,6 +1,8 @@
-import { closeSync, openSync, renameSync, rmSync } from 'node:fs';
+import { randomUUID } from 'node:crypto';
+import { existsSync, linkSync, renameSync, rmSync } from 'node:fs';
 import { backup, DatabaseSync } from 'node:sqlite';
 import { OperatorError } from '../../operator-error.ts';
+import { StoreError } from '../store-error.ts';
 import { asOperatorError } from './as-operator-error.ts';
 import { callSqlite, sqliteFault } from './sqlite-fault.ts';
 
@@ -14,48 +16,56 @@ const AT_ONCE = 200;
  * @throws OperatorError where there is something at `to` already, or nothing can be put there
  */
 export async function copyFile(path: string, to: string): Promise<void> {
-  const unfinished = `${to}.unfinished`;
-  reserve(to);
+  refuseExisting(to);
+  const unfinished = `${to}.${randomUUID()}.unfinished`;
   try {
-    rmSync(unfinished, { force: true });
-    // A connection of its own with an open view: the copy is of one moment, and need not begin anew at each write.
-    const source = callSqlite(() => new DatabaseSync(path, { readOnly: true }));
-    try {
-      callSqlite(() => source.exec('begin; select count(*) from cellar'));
-      await backup(source, unfinished, { rate: AT_ONCE });
-    } catch (error) {
-      throw sqliteFault(error);
-    } finally {
-      source.close();
-    }
+    await copyPages(path, unfinished);
     makePlain(unfinished);
-    renameSync(unfinished, to);
+    giveName(unfinished, to);
   } catch (error) {
+    const fault = sqliteFault(error);
+    const isOfSource = fault instanceof StoreError && fault.kind === 'damaged';
+    throw asOperatorError(fault, isOfSource ? path : to);
+  } finally {
     rmSync(unfinished, { force: true });
-    rmSync(to, { force: true });
-    throw error;
   }
 }
 
-function reserve(to: string): void {
+async function copyPages(path: string, to: string): Promise<void> {
+  // A connection of its own with an open view: the copy is of one moment, and need not begin anew at each write.
+  const source = callSqlite(() => new DatabaseSync(path, { readOnly: true }));
   try {
-    closeSync(openSync(to, 'wx'));
-  } catch (cause) {
-    if ((cause as NodeJS.ErrnoException).code !== 'EEXIST') throw asOperatorError(cause, to);
-    throw new OperatorError(`There is something at ${to} already: name a file that does not exist yet.`, {
-      cause,
-    });
+    source.exec('begin; select count(*) from cellar');
+    await backup(source, to, { rate: AT_ONCE });
+  } finally {
+    source.close();
   }
 }
 
 /** Without the files that go with writing, so that the copy is one file, and can be read where nothing can be written. */
 function makePlain(copy: string): void {
-  callSqlite(() => {
-    const connection = new DatabaseSync(copy);
-    try {
-      connection.exec('pragma journal_mode = delete');
-    } finally {
-      connection.close();
-    }
+  const connection = new DatabaseSync(copy);
+  try {
+    connection.exec('pragma journal_mode = delete');
+  } finally {
+    connection.close();
+  }
+}
+
+function giveName(unfinished: string, to: string): void {
+  try {
+    // Unlike a renaming, a link never takes the place of anything.
+    linkSync(unfinished, to);
+  } catch (error) {
+    refuseExisting(to, error);
+    // Some disks that one carries about know no links.
+    renameSync(unfinished, to);
+  }
+}
+
+function refuseExisting(to: string, cause?: unknown): void {
+  if (!existsSync(to)) return;
+  throw new OperatorError(`There is something at ${to} already: name a file that does not exist yet.`, {
+    cause,
   });
 }

@@ -37,10 +37,27 @@ create trigger entry_stays before update on entry
 begin select raise(abort, 'an entry of the log is never changed'); end;
 create trigger entry_is_kept before delete on entry
 begin select raise(abort, 'an entry of the log is never deleted'); end;
+-- Also "insert or replace" would change an entry, and without the triggers above.
+create trigger entry_is_new before insert on entry
+when new.entry <> 1 + coalesce((select entry from entry where cellar = new.cellar order by entry desc limit 1), 0)
+  or exists (select 1 from entry where cellar = new.cellar and key = new.key)
+  or exists (select 1 from entry where cellar = new.cellar and corrects = new.corrects)
+begin select raise(abort, 'an entry of the log is new, and has the next number'); end;
 create trigger touched_stays before update on touched
 begin select raise(abort, 'an entry of the log is never changed'); end;
 create trigger touched_is_kept before delete on touched
 begin select raise(abort, 'an entry of the log is never deleted'); end;
+
+-- How a large log is spread, fixed: SQLite chooses an index by it. Without, or with the figures of a young file, it
+-- would look for the last entry of a person through all of them.
+analyze;
+insert into sqlite_stat1 (tbl, idx, stat) values
+  ('entry', 'entry', '1000000 250000 1'),
+  ('entry', 'entry_by_key', '1000000 250000 1'),
+  ('entry', 'entry_by_time', '1000000 250000 1 1'),
+  ('entry', 'entry_by_person', '1000000 250000 50000 1'),
+  ('entry', 'entry_by_corrected', '20000 5000 1'),
+  ('touched', 'touched', '1000000 250000 5000 1 1');
 
 create table vessel (
   cellar text    not null,
