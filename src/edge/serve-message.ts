@@ -1,6 +1,6 @@
 import type { CellarStore } from '../core/cellar/cellar-store.ts';
 import { faultReply } from '../chat/conversation/fault-reply.ts';
-import type { Handle, Handled, IncomingMessage } from '../chat/conversation/ports.ts';
+import type { Errand, Handle, Handled, IncomingMessage } from '../chat/conversation/ports.ts';
 import type { Settings } from '../chat/conversation/settings.ts';
 import type { Said, Say } from '../chat/replies/say.ts';
 import { StoreError } from './store/store-error.ts';
@@ -21,6 +21,8 @@ export interface Served {
   readonly said: readonly Said[];
   readonly answers?: Handled['answers'];
   readonly understood?: Handled['understood'];
+  /** Something with files that is still to be done. */
+  readonly errand?: Errand;
 }
 
 /** Serves a message: handled in a turn of its cellar, and answered only once what it wrote is durable. Never rejects. */
@@ -31,12 +33,17 @@ export function makeServe({ handle, say, store, settings, report }: Serving): Se
   return async (message) => {
     try {
       return await store.turn(message.cellar, async (view) => {
-        const { writes, replies, answers, understood } = await handle(message, view, settings);
+        const { writes, replies, answers, understood, errand } = await handle(message, view, settings);
         // Said inside the turn: what cannot be said is not kept either.
         const said = replies.map(say);
         return {
           writes,
-          result: { said, ...(answers && { answers }), ...(understood && { understood }) },
+          result: {
+            said,
+            ...(answers && { answers }),
+            ...(understood && { understood }),
+            ...(errand && { errand }),
+          },
         };
       });
     } catch (fault) {

@@ -39,6 +39,7 @@ export interface SentenceValues {
   'assumed-target-red': 'kind' | 'value';
   'assumed-target-sweet': 'kind' | 'value';
   at: 'vessel';
+  'backup-elsewhere': never;
   'backup-written': 'path';
   'bare-amount': 'amount' | 'count' | 'unit';
   'basis-oiv': 'celsius' | 'pK' | 'percent';
@@ -173,7 +174,7 @@ export interface SentenceValues {
   'entry-reading': 'list' | 'vessel';
   'entry-stock': 'text';
   'entry-vessel': 'event' | 'list' | 'lot' | 'to' | 'vessel' | 'whole';
-  'errand-failed': 'reason';
+  'errand-failed': never;
   'event-said': 'event' | 'lot' | 'to' | 'whole';
   'export-SO2_g': never;
   'export-added_mg_L': never;

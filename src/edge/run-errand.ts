@@ -1,0 +1,104 @@
+import type { CellarStore } from '../core/cellar/cellar-store.ts';
+import type { Errand, IncomingMessage } from '../chat/conversation/ports.ts';
+import type { Settings } from '../chat/conversation/settings.ts';
+import type { Line } from '../chat/replies/reply.ts';
+import type { Said, Say } from '../chat/replies/say.ts';
+import type { ExportFile } from './files/make-export.ts';
+import type { Serve } from './serve-message.ts';
+
+/** What errands need. */
+export interface Errands {
+  readonly store: CellarStore;
+  readonly say: Say;
+  readonly serve: Serve;
+  readonly settings: Settings;
+  /** The bytes of a file by the name that somebody wrote; undefined where there is none, or where none may be read. */
+  readonly readFile: (name: string) => Promise<Uint8Array | undefined>;
+  /** Where a backup goes; absent where none is made from this chat. */
+  readonly backupPath?: (now: number) => string;
+  readonly report: (fault: unknown) => void;
+}
+
+/** What an errand brings back: something to say, and perhaps a file to hand over. */
+export interface Brought {
+  readonly said: readonly Said[];
+  readonly file?: ExportFile;
+}
+
+/** Makes the running of errands: exports, imports and backups, off the reply path. Never rejects. */
+export function makeRunErrand(
+  errands: Errands,
+): (errand: Errand, message: IncomingMessage) => Promise<Brought> {
+  return async (errand, message) => {
+    try {
+      return await runErrand(errand, message, errands);
+    } catch (fault) {
+      errands.report(fault);
+      return { said: [saying('errand-failed', {}, message, errands.say)] };
+    }
+  };
+}
+
+function runErrand(errand: Errand, message: IncomingMessage, errands: Errands): Promise<Brought> {
+  switch (errand.kind) {
+    case 'export':
+      return runExport(errand, message, errands);
+    case 'import':
+      return runImport(errand, message, errands);
+    case 'backup':
+      return runBackup(message, errands);
+  }
+}
+
+async function runExport(
+  errand: Extract<Errand, { kind: 'export' }>,
+  message: IncomingMessage,
+  { store, say }: Errands,
+): Promise<Brought> {
+  const { from, to, vessel, format, zone, decimalMark, language } = errand;
+  // From the beginning on: what was known of a wine then follows from all that came before.
+  const { entries, people } = await store.look(message.cellar, async (view) => ({
+    entries: await view.entries({ ...(to !== undefined && { to }) }),
+    people: await view.people(),
+  }));
+  const isWanted = entries.some(
+    ({ at, vessels }) =>
+      (from === undefined || at >= from) && (vessel === undefined || vessels.includes(vessel)),
+  );
+  if (!isWanted) return { said: [saying('export-none', {}, message, say)] };
+  const span = {
+    ...(from !== undefined && { from }),
+    ...(to !== undefined && { to }),
+    ...(vessel !== undefined && { vessel }),
+  };
+  const { makeExport } = await import('./files/make-export.ts');
+  return {
+    said: [],
+    file: await makeExport({ entries, people, span, format, zone, decimalMark, language }, say),
+  };
+}
+
+async function runImport(
+  { file }: Extract<Errand, { kind: 'import' }>,
+  message: IncomingMessage,
+  { readFile, serve, say, settings }: Errands,
+): Promise<Brought> {
+  const bytes = await readFile(file);
+  if (bytes === undefined) return { said: [saying('import-no-file', { file }, message, say)] };
+  const { readImport } = await import('./files/read-import.ts');
+  const noting = { key: `import ${JSON.stringify([message.chat, message.id])}`, at: message.at, by: 1 };
+  const read = await readImport(bytes, { reader: settings, noting });
+  const { said } = await serve({ ...message, id: `${message.id} file`, content: { kind: 'file', read } });
+  return { said };
+}
+
+async function runBackup(message: IncomingMessage, { store, backupPath, say }: Errands): Promise<Brought> {
+  const path = backupPath?.(message.at);
+  if (path === undefined) return { said: [saying('backup-elsewhere', {}, message, say)] };
+  await store.backup(path);
+  return { said: [saying('backup-written', { path }, message, say)] };
+}
+
+function saying(key: string, values: Line['values'], { language }: IncomingMessage, say: Say): Said {
+  return say({ language, lines: [{ room: 'first', key, values }], buttons: [] });
+}
