@@ -60,7 +60,12 @@ async function fitted(read: ImportRead, here: Here, view: CellarView): Promise<F
   for (const { key } of read.entries) if ((await view.entryOfKey(key)) !== undefined) known.add(key);
   const people = await view.people();
   const me = { number: here.me, name: here.message.name };
-  return fitImport(read, {
+  // A list of vessels is noted by whoever takes it.
+  const own =
+    read.kind === 'vessels'
+      ? { ...read, entries: read.entries.map((one) => ({ ...one, by: here.me })) }
+      : read;
+  return fitImport(own, {
     nextEntry: here.nextEntry,
     people:
       here.isNewPerson && !people.some(({ number }) => number === me.number)
