@@ -88,7 +88,9 @@ function dosedLine(
 function landedToday(reading: Reading, dosed: Dosed, free_mg_L: number, turn: Turn): Outcome {
   const { here, manner } = turn;
   const sample = { entry: here.nextEntry, at: whenOf(reading, here).at, free_mg_L };
-  const landing = landingOf(dosed.vessel, sample);
+  // The reading was noted with its message: then it is the last that landed.
+  const isNoted = reading.noted?.includes('free_mg_L') === true;
+  const landing = isNoted ? dosed.vessel.landings.at(-1) : landingOf(dosed.vessel, sample);
   const lines = [
     ...(landing ? landedLines(dosed.vessel.vessel, landing, manner) : []),
     dosedLine(dosed, 'dosed-landed', turn),
