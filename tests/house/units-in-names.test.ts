@@ -45,6 +45,8 @@ const BARE = new Set([
   'position',
   'at', // a time in milliseconds since 1970, as in every `…At`
   'nextNumber',
+  'nextEntry',
+  'now', // a time in milliseconds since 1970
   'entry', // numbers of entries, and of people
   'corrects',
   'order',

@@ -14,10 +14,10 @@ export type When =
   | { readonly is: 'future' | 'no-such-day'; readonly at: number };
 
 /** When a reading was sampled, or an addition made: as it was said, else when the message was sent. */
-export function whenOf({ when, sampled }: Reading, here: Here, lastAddition?: number): When {
+export function whenOf({ when, sampled }: Reading, here: Here, lastAddedAt?: number): When {
   const { at } = here.message;
-  if (sampled === 'before' && lastAddition !== undefined && when?.hour === undefined)
-    return { is: 'told', at: lastAddition - MINUTE_ms };
+  if (sampled === 'before' && lastAddedAt !== undefined && when?.hour === undefined)
+    return { is: 'told', at: lastAddedAt - MINUTE_ms };
   if (when === undefined) return { is: 'now', at };
   const zone = zoneOf(here.settings);
   const resolved = resolveWhen(when, { at, zone });

@@ -23,7 +23,7 @@ export interface Talk {
   readonly send: (content: Content) => Promise<Handled>;
   readonly write: (text: string) => Promise<Handled>;
   readonly press: (key: string) => Promise<Handled>;
-  /** What is kept of the talk by now. */
+  /** What is kept of the conversation by now. */
   readonly memory: () => Promise<Memory>;
   readonly look: <T>(work: (view: CellarView) => Promise<T>) => Promise<T>;
 }

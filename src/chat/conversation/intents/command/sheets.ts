@@ -35,7 +35,7 @@ export async function daySheet(said: SaidDay, here: Here, view: CellarView): Pro
   const shown = entries.slice(-A_SHEET);
   const near = await withPeople(here, view);
   const telling = tellingOf(here);
-  const head = line('first', 'day-head', { day: text, zone, count: String(shown.length) });
+  const head = line('first', 'day-head', { day: text, zone });
   const rows = shown.map((entry) => sheetLine(entry, clockText(entry.at, telling), near));
   const more = entries.length > A_SHEET ? [line('first', 'day-more')] : [];
   return inMessages([head, ...rows, ...more], here);
