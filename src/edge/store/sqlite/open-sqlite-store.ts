@@ -48,7 +48,7 @@ export async function openSqliteStore(path: string, options: SqliteStoreOptions)
     const isLarge = fileSize(file) > CHECKED_AT_START_bytes;
     const damage = isLarge ? undefined : findDamage(writer);
     if (damage !== undefined) throw new OperatorError(damagedSentence(file, damage));
-    configure(writer);
+    configure(writer, file);
     migrate(writer, version);
     const reader = callSqlite(() => new DatabaseSync(file, { readOnly: true, timeout: PATIENCE_ms }));
     toClose.push(() => reader.close());
@@ -79,10 +79,13 @@ function realPath(path: string): string {
   }
 }
 
-function configure(writer: DatabaseSync): void {
+function configure(writer: DatabaseSync, path: string): void {
+  const mode = callSqlite(() => writer.prepare('pragma journal_mode = wal').get())?.['journal_mode'];
+  if (mode !== 'wal')
+    throw new OperatorError(`${path} lies where it cannot be kept safely: name a file on a local disk.`);
   callSqlite(() =>
     writer.exec(
-      `pragma journal_mode = wal; pragma synchronous = full; pragma secure_delete = fast; pragma journal_size_limit = ${WAL_KEPT_bytes}`,
+      `pragma synchronous = full; pragma secure_delete = fast; pragma journal_size_limit = ${WAL_KEPT_bytes}`,
     ),
   );
 }

@@ -73,7 +73,10 @@ test.each<[string, string, (writer: DatabaseSync, path: string) => () => void]>(
   },
 );
 
-test('what a turn read of one that was lost comes to nothing with it', async () => {
+test.each([
+  ['that wrote on it', [writeOf(note(3))]],
+  ['that only read it', []],
+])('a turn %s is lost with the one that it read of', async (_, writes) => {
   const { store, writer } = troubled();
   await noteIn(store, note(1));
   const { promise: whenRead, resolve: wasRead } = Promise.withResolvers<void>();
@@ -85,7 +88,7 @@ test('what a turn read of one that was lost comes to nothing with it', async () 
     writer.exec('rollback');
     wasRead();
     await whenLost;
-    return { writes: [writeOf(note(3, { remark: `after ${next - 1}` }))], result: next };
+    return { writes, result: next };
   });
   await whenRead;
   await expect(first).rejects.toThrow(/./);
