@@ -8,8 +8,8 @@ import { testPeople } from './cellar-store/people.ts';
 import { testProjection } from './cellar-store/projection.ts';
 import { testTurns } from './cellar-store/turns.ts';
 
-/** What every store of cellars has to do; each implementation runs it. */
-export function testCellarStore(name: string, create: CreateStore): void {
+/** What every store of cellars has to do; each implementation runs it, with so many random logs. */
+export function testCellarStore(name: string, create: CreateStore, { anyLogs }: { anyLogs: number }): void {
   describe(`${name} as a store of cellars`, () => {
     describe('keeps a log', () => {
       testLog(create);
@@ -30,7 +30,7 @@ export function testCellarStore(name: string, create: CreateStore): void {
       testDue(create);
     });
     describe('derives vessels from the log', () => {
-      testProjection(create);
+      testProjection(create, anyLogs);
     });
   });
 }

@@ -12,7 +12,7 @@ const ph = async (store: CellarStore, name: string): Promise<number | undefined>
   (await store.look('cellar 1', (view) => view.vessel(name)))?.ph?.value;
 
 /** What is known of vessels, whatever comes in whatever order. */
-export function testProjection(create: CreateStore): void {
+export function testProjection(create: CreateStore, anyLogs: number): void {
   test('by name, from their first entry on', async () => {
     const store = await create(() => 0);
     expect(await vessels(store)).toEqual([]);
@@ -87,6 +87,6 @@ export function testProjection(create: CreateStore): void {
       await store.close();
     };
     const property = fc.asyncProperty(anyTurns(40), (turns) => oneLog(turns.map((turn) => [...turn])));
-    await fc.assert(property, { numRuns: 30 });
+    await fc.assert(property, { numRuns: anyLogs });
   });
 }
