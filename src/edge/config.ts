@@ -9,14 +9,21 @@ export interface Config {
   /** Where the Bot API is, without a slash at the end. */
   readonly botApiRoot: string;
   readonly logLevel: LogLevel;
+  /** The cellar's file. */
+  readonly dataFile: string;
   /** Variables that are set and right, but that this version does nothing with. */
   readonly notServedYet: readonly string[];
 }
 
-const SERVED = ['BOT_TOKEN', 'BOT_API_ROOT', 'LOG_LEVEL'] as const;
-const NOT_SERVED_YET = ['DATA_FILE', 'WEBHOOK_URL', 'WEBHOOK_SECRET', 'PORT'] as const;
+const SERVED = ['BOT_TOKEN', 'BOT_API_ROOT', 'LOG_LEVEL', 'DATA_FILE'] as const;
+const NOT_SERVED_YET = ['WEBHOOK_URL', 'WEBHOOK_SECRET', 'PORT'] as const;
 
-const USUAL: Config = { botApiRoot: 'https://api.telegram.org', logLevel: 'info', notServedYet: [] };
+const USUAL: Config = {
+  botApiRoot: 'https://api.telegram.org',
+  logLevel: 'info',
+  dataFile: 'data/cellar.db',
+  notServedYet: [],
+};
 
 /**
  * Reads the configuration from the environment. Blanks around a value are dropped, and an empty one counts as not
@@ -33,11 +40,13 @@ export async function readConfig(environment: Environment): Promise<Config> {
   const { VARIABLES } = await import('./variables.ts');
   const read = VARIABLES.safeParse(Object.fromEntries(set));
   if (!read.success) throw new OperatorError(read.error.issues.map((issue) => issue.message).join('\n'));
-  const { BOT_TOKEN, BOT_API_ROOT = USUAL.botApiRoot, LOG_LEVEL = USUAL.logLevel } = read.data;
+  const { BOT_TOKEN, BOT_API_ROOT = USUAL.botApiRoot } = read.data;
+  const { LOG_LEVEL = USUAL.logLevel, DATA_FILE = USUAL.dataFile } = read.data;
   return {
     ...(BOT_TOKEN === undefined ? {} : { botToken: BOT_TOKEN }),
     botApiRoot: BOT_API_ROOT.replace(/\/+$/, ''),
     logLevel: LOG_LEVEL,
+    dataFile: DATA_FILE,
     notServedYet: NOT_SERVED_YET.filter((name) => read.data[name] !== undefined),
   };
 }

@@ -1,18 +1,28 @@
+import type { CellarStore } from '../core/cellar/cellar-store.ts';
 import { handle } from '../chat/conversation/conversation.ts';
-import type { IncomingMessage } from '../chat/conversation/ports.ts';
-import type { Memory } from '../chat/conversation/memory.ts';
-import { DEFAULT_SETTINGS } from '../chat/conversation/settings.ts';
+import { DEFAULT_SETTINGS, type Settings } from '../chat/conversation/settings.ts';
 import { makeSay } from '../chat/replies/say.ts';
 import { makeAudit } from './audit-workings.ts';
 import { systemClock as clock } from './clock.ts';
-import { readConfig } from './config.ts';
-import { loadEnvironment } from './environment.ts';
+import { readConfig, type Config } from './config.ts';
+import { loadEnvironment, type Environment } from './environment.ts';
 import { loadLocales } from './locales.ts';
-import { createOperator } from './operator.ts';
+import { machineZone } from './machine-zone.ts';
+import { createOperator, type Operator } from './operator.ts';
+import { makeServe } from './serve-message.ts';
+import { shownName } from './shown-name.ts';
 import { stopSignal } from './stop-signal.ts';
-import { createMemoryStore } from './store/memory.ts';
 
 const STDOUT = 1;
+
+/** What both chats stand on. */
+interface Ground {
+  readonly config: Config;
+  readonly environment: Environment;
+  readonly operator: Operator;
+  readonly store: CellarStore;
+  readonly signal: AbortSignal;
+}
 
 /** Joins the parts and serves: on Telegram where a token is set, else in the terminal. Resolves at a clean stop. */
 export async function start(): Promise<void> {
@@ -24,36 +34,58 @@ export async function start(): Promise<void> {
   const config = await readConfig(environment);
   for (const name of config.notServedYet) operator.tell(`${name} is not served yet; it changes nothing.`);
 
-  const audit = makeAudit(operator.tell);
-  const conversation = {
-    handle: (message: IncomingMessage, memory: Memory) => handle(message, memory, DEFAULT_SETTINGS),
-    say: makeSay(loadLocales()),
-    state: createMemoryStore(),
-    signal: stopSignal(),
-  };
-
-  // Each edge is loaded only when it is the one that serves.
-  const { botToken } = config;
-  if (botToken === undefined) {
-    const { runTerminal } = await import('./terminal/chat.ts');
-    const { stdin: input, stdout: output } = process;
-    const interactive = input.isTTY && output.isTTY;
-    await runTerminal({
-      ...conversation,
-      input,
-      output,
-      now: clock.now,
-      language: 'en',
-      interactive,
-      report: operator.report,
-      // A pipe ends with its answer, and waits for nothing more.
-      ...(interactive && { audit }),
-    });
-  } else {
-    const { createLog } = await import('./logging.ts');
-    const { serveTelegram } = await import('./telegram/serve-telegram.ts');
-    const log = createLog({ level: config.logLevel, secret: botToken, to: STDOUT });
-    const { tell } = operator;
-    await serveTelegram({ ...conversation, config: { ...config, botToken }, log, clock, tell, audit });
+  const { openSqliteStore } = await import('./store/sqlite/open-sqlite-store.ts');
+  const store = await openSqliteStore(config.dataFile, {
+    now: clock.now,
+    report: (damage) => operator.tell(damage.message),
+  });
+  try {
+    const ground = { config, environment, operator, store, signal: stopSignal() };
+    // Each chat is loaded only when it is the one that serves.
+    await (config.botToken === undefined ? startTerminal(ground) : startTelegram(ground, config.botToken));
+  } finally {
+    await store.close();
   }
+}
+
+async function startTerminal({ environment, operator, store, signal }: Ground): Promise<void> {
+  const { runTerminal } = await import('./terminal/chat.ts');
+  const { stdin: input, stdout: output } = process;
+  const interactive = input.isTTY && output.isTTY;
+  const { USER, USERNAME, LOGNAME } = environment;
+  const name = shownName(USER ?? USERNAME ?? LOGNAME);
+  const zone = machineZone();
+  const settings: Settings = { ...DEFAULT_SETTINGS, ...(zone !== undefined && { zone }) };
+  const say = makeSay(loadLocales());
+  await runTerminal({
+    serve: makeServe({ handle, say, store, settings, report: operator.report }),
+    say,
+    input,
+    output,
+    now: clock.now,
+    language: 'en',
+    interactive,
+    signal,
+    ...(name !== undefined && { name }),
+    // A pipe ends with its answer, and waits for nothing more.
+    ...(interactive && { audit: makeAudit(operator.tell) }),
+  });
+}
+
+async function startTelegram({ config, operator, store, signal }: Ground, botToken: string): Promise<void> {
+  const { createLog } = await import('./logging.ts');
+  const { serveTelegram } = await import('./telegram/serve-telegram.ts');
+  const log = createLog({ level: config.logLevel, secret: botToken, to: STDOUT });
+  const { tell } = operator;
+  const report = (err: unknown): void => log.error({ err }, 'a message could not be answered');
+  const say = makeSay(loadLocales());
+  await serveTelegram({
+    serve: makeServe({ handle, say, store, settings: DEFAULT_SETTINGS, report }),
+    config: { ...config, botToken },
+    log,
+    clock,
+    tell,
+    audit: makeAudit(tell),
+    signal,
+  });
 }

@@ -24,7 +24,10 @@ export const VARIABLES = z.object({
   LOG_LEVEL: z
     .enum(LOG_LEVELS, `LOG_LEVEL is not a level: it must be one of ${LOG_LEVELS.join(', ')}, or be left out.`)
     .optional(),
-  DATA_FILE: z.string().optional(),
+  DATA_FILE: z
+    .string()
+    .regex(/[^/\\]$/, 'DATA_FILE is not a file: it must not end in a slash, or be left out.')
+    .optional(),
   WEBHOOK_URL: url(
     /^https:$/,
     'WEBHOOK_URL is not an address: it must begin with https://, or be left out.',

@@ -2,7 +2,12 @@ import { describe, expect, test } from 'vitest';
 
 import { readConfig } from '../../src/edge/config.ts';
 
-const USUAL = { botApiRoot: 'https://api.telegram.org', logLevel: 'info', notServedYet: [] };
+const USUAL = {
+  botApiRoot: 'https://api.telegram.org',
+  logLevel: 'info',
+  dataFile: 'data/cellar.db',
+  notServedYet: [],
+};
 
 describe('the configuration', () => {
   test.each([
@@ -16,10 +21,11 @@ describe('the configuration', () => {
       { ...USUAL, botApiRoot: 'http://127.0.0.1:81' },
     ],
     ['a level is set', { LOG_LEVEL: 'silent' }, { ...USUAL, logLevel: 'silent' }],
+    ['a file is set', { DATA_FILE: 'other place/a.db' }, { ...USUAL, dataFile: 'other place/a.db' }],
     [
       'variables of later versions are set',
-      { DATA_FILE: 'a.db', WEBHOOK_URL: 'https://cellar.example/in', WEBHOOK_SECRET: 'a_b-1', PORT: '8443' },
-      { ...USUAL, notServedYet: ['DATA_FILE', 'WEBHOOK_URL', 'WEBHOOK_SECRET', 'PORT'] },
+      { WEBHOOK_URL: 'https://cellar.example/in', WEBHOOK_SECRET: 'a_b-1', PORT: '8443' },
+      { ...USUAL, notServedYet: ['WEBHOOK_URL', 'WEBHOOK_SECRET', 'PORT'] },
     ],
   ])('is understood when %s', async (_, environment, config) => {
     expect(await readConfig(environment)).toEqual(config);
@@ -31,6 +37,7 @@ describe('the configuration', () => {
     ['BOT_API_ROOT', 'api.telegram.org'],
     ['BOT_API_ROOT', 'file:///etc'],
     ['LOG_LEVEL', 'loud'],
+    ['DATA_FILE', 'data/'],
     ['WEBHOOK_URL', 'http://cellar.example/in'],
     ['WEBHOOK_SECRET', 'with a space'],
     ['PORT', '70000'],

@@ -1,10 +1,11 @@
 import { spawn, type ChildProcess } from 'node:child_process';
-import { mkdtempSync, rmSync, writeFileSync } from 'node:fs';
+import { mkdtempSync, readdirSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 
 import { afterEach, beforeEach, describe, expect, test } from 'vitest';
 
+import { openSqliteReader } from '../../src/edge/store/sqlite/open-sqlite-reader.ts';
 import { FakeBotApi, TOKEN } from './telegram/fake-bot-api.ts';
 import { Person } from './telegram/person.ts';
 
@@ -47,6 +48,19 @@ afterEach(() => {
   if (shown.includes(TOKEN.slice(TOKEN.indexOf(':') + 1))) throw new Error('The token was shown');
 });
 
+/** What is in the file of the cellar. */
+const kept = async (): Promise<{ masses_g: unknown[]; people: unknown }> => {
+  const reader = await openSqliteReader(join(folder, 'data', 'cellar.db'), { now: () => 0 });
+  try {
+    return await reader.look('cellar', async (view) => ({
+      masses_g: (await view.entries({})).map((entry) => 'mass_g' in entry && entry.mass_g),
+      people: await view.people(),
+    }));
+  } finally {
+    await reader.close();
+  }
+};
+
 // Each starts a process, which takes a while on a machine that has other things to do.
 describe('the program', { timeout: 30_000 }, () => {
   test('without a token answers what comes through the pipe, and ends', async () => {
@@ -56,7 +70,43 @@ describe('the program', { timeout: 30_000 }, () => {
     expect(run.err()).toBe('');
   });
 
+  test('keeps what was noted in the file, under the name of whoever runs it, and leaves it closed', async () => {
+    for (const mass of [137, 138])
+      expect(await start({ USER: 'rosa' }, `added ${mass} g kmbs T12\n`).exit).toBe(0);
+    expect(readdirSync(join(folder, 'data')).toSorted()).toEqual(['cellar.db', 'cellar.db-writer']);
+    expect(await kept()).toEqual({ masses_g: [137, 138], people: [{ number: 1, name: 'rosa' }] });
+  });
+
+  test('tells the time by the clock of the machine', async () => {
+    // Without the zero in front that a reply leaves out before ten.
+    const clock = (): string =>
+      new Date().toLocaleTimeString('en-GB', { timeZone: 'Asia/Tokyo' }).slice(0, 5).replace(/^0/, '');
+    const before = clock();
+    const run = start({ TZ: 'Asia/Tokyo' }, 'added 137 g kmbs T12\n');
+    expect(await run.exit).toBe(0);
+    const told = [before, clock()].filter((time) => run.out().includes(time));
+    expect(told).not.toEqual([]);
+  });
+
+  test('of two on one file the second ends with status 78 and a sentence, and a lock dies with its process', async () => {
+    const first = spawn(process.execPath, [MAIN], { cwd: folder, env: {} });
+    try {
+      first.stdin.write('added 137 g kmbs T12\n\n');
+      await new Promise((resolve) => first.stdout.once('data', resolve));
+      const second = start({}, 'added 138 g kmbs T12\n');
+      expect(await second.exit).toBe(78);
+      expect(second.err()).toMatch(/^Another brimnote is writing to [^\n]+\n$/);
+      expect(second.out()).toBe('');
+    } finally {
+      first.kill('SIGKILL');
+    }
+    expect(await start({}, 'added 139 g kmbs T12\n').exit).toBe(0);
+    expect((await kept()).masses_g).toEqual([137, 139]);
+  });
+
   test.each<[string, Record<string, string>, string]>([
+    ['a file that is a folder', { DATA_FILE: '.' }, 'check DATA_FILE'],
+    ['a file in what is no folder', { DATA_FILE: `${MAIN}/cellar.db` }, 'check DATA_FILE'],
     ['a wrong level', { LOG_LEVEL: 'loud' }, 'LOG_LEVEL is not a level'],
     ['a token with a blank in it', { BOT_TOKEN: `${TOKEN} x` }, 'BOT_TOKEN is not a bot token'],
   ])('ends with status 78 and one sentence for %s', async (_, environment, sentence) => {

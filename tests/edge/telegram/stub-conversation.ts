@@ -9,7 +9,7 @@ export const handle: Handle = async ({ content, language, chat }, view) => {
       ? content.text
       : content.kind === 'press'
         ? `pressed ${content.key}`
-        : `a ${content.what}`;
+        : `a ${'what' in content ? content.what : content.kind}`;
   const count = Number((await view.kept(chat)) ?? 0) + 1;
   const reply = (text: string): Reply => ({
     language,
