@@ -1,6 +1,6 @@
 import type { Language } from './understood.ts';
 import type { Tag, Words } from './words/words.ts';
-import { en } from './words/en.ts';
+import { READ_IN_FULL } from './words/read-in-full.ts';
 
 /** What is known of a word or phrase: its tags, and in which languages it is one. */
 export interface Entry {
@@ -74,4 +74,4 @@ export function buildLexicon(lists: readonly Words[]): Lexicon {
 }
 
 /** The words of every language that is read in full. */
-export const LEXICON: Lexicon = buildLexicon([en]);
+export const LEXICON: Lexicon = buildLexicon(READ_IN_FULL);

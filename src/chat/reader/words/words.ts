@@ -46,6 +46,26 @@ export type Tag =
   | 'vessel:other'
   | 'organic';
 
+/**
+ * The bot's own words, those of statements about a vessel, of moments and of remarks. They are looked up apart from
+ * `says`, so that none of them changes how a reading is read.
+ */
+export type OwnWordId =
+  | 'filler' | 'courtesy' | 'article' | 'if' | 'ask' | 'show' | 'vessels' | 'today' | 'yesterday' | 'before-yesterday' | 'sheet' | 'what-was-added'
+  | 'history' | 'undo' | 'strike' | 'entry' | 'because' | 'order' | 'orders' | 'open' | 'still' | 'due' | 'later' | 'tomorrow' | 'next-week'
+  | 'remind' | 'again' | 'not' | 'unwatch' | 'watch' | 'settings' | 'export' | 'import' | 'backup' | 'forget'
+  | 'forget-me' | 'this' | 'last' | 'month' | 'year' | 'all' | 'csv' | 'xlsx'
+  | 'work-in' | 'units' | 'metric' | 'litres' | 'us' | 'imperial' | 'gallons' | 'usual' | 'usual-bare' | 'default' | 'target' | 'target-kind'
+  | 'reds' | 'whites' | 'sweets' | 'red' | 'white' | 'sweet' | 'for' | 'quiet' | 'daily' | 'zone' | 'we-are-in' | 'utc'
+  | 'allowance' | 'percent' | 'no' | 'off' | 'basis' | 'oiv' | 'replies' | 'short' | 'long' | 'ph' | 'counts'
+  | 'check' | 'every' | 'often'
+  | 'is' | 'has' | 'now' | 'who' | 'done-to' | 'racked' | 'moved' | 'pumped' | 'over' | 'topped' | 'blended'
+  | 'emptied' | 'empty' | 'acidified' | 'went-in' | 'acid' | 'some' | 'holds' | 'capacity' | 'tank' | 'in-it' | 'there-is' | 'in' | 'wine' | 'and' | 'left'
+  | 'to' | 'from' | 'with' | 'of' | 'off-lees' | 'finished' | 'ml-way' | 'lot' | 'number' | 'remark' | 'remark-bare' | 'bottled'
+  | 'sampled' | 'at' | 'on' | 'until' | 'moment-bar' | 'this-morning' | 'last-night' | 'part-of-day' | 'ago' | 'am'
+  | 'pm' | 'oclock' | 'noon' | 'hour' | 'minute' | 'day' | 'week' | 'ordinal'
+  | 'count-half' | 'count-1' | 'count-2' | 'count-3' | 'count-4' | 'count-5' | 'count-6'; // prettier-ignore
+
 /** The groups of words that together make an emergency; `emergency.ts` holds the rules. */
 export type DangerId =
   | 'down' | 'breathless' | 'person' | 'thing' | 'silent' | 'went-in' | 'hurt-eye' | 'swallowed' | 'drank' | 'vessel' | 'fell' | 'beside' | 'unwell' | 'mixed' | 'reactive' | 'smell' | 'place' | 'skin' | 'idiom'
@@ -62,5 +82,10 @@ export interface Words {
   readonly says: Readonly<Partial<Record<Tag, readonly string[]>>>;
   /** Ordinary words, other chemicals and words of other languages that are one letter from a cellar word and none. */
   readonly neverMended?: readonly string[];
+  readonly own?: Readonly<Partial<Record<OwnWordId, readonly string[]>>>;
+  /** The names of the months in their order, January first; each the whole word and what shortens it. */
+  readonly months?: readonly (readonly string[])[];
+  /** The days of the week in their order, Monday first; no shortening that is also another word. */
+  readonly weekdays?: readonly (readonly string[])[];
   readonly danger: Readonly<Partial<Record<DangerId, readonly string[]>>>;
 }
