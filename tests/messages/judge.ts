@@ -9,7 +9,14 @@ export interface Expected {
   readonly fields: Readonly<Record<string, unknown>>;
   readonly asks: readonly string[];
   readonly problems: readonly string[];
+  readonly command?: unknown;
+  readonly when?: unknown;
+  readonly chemical_lot?: string;
+  readonly remark?: string;
 }
+
+/** What stands beside the fields of a reading, and is compared where a file of labels is about it. */
+const BESIDE = ['command', 'when', 'chemical_lot', 'remark'] as const;
 
 /** One labelled message: a single reading, or a round with what its first line shares. */
 export interface Labelled {
@@ -41,6 +48,10 @@ function rounded(value: unknown): unknown {
   );
 }
 
+function besideOf(one: Partial<Record<(typeof BESIDE)[number], unknown>>): unknown {
+  return Object.fromEntries(BESIDE.flatMap((name) => (one[name] === undefined ? [] : [[name, one[name]]])));
+}
+
 /** The reading in the form of a label. Beside a problem only its codes count, as nothing is computed there. */
 function shown({ intent, fields, assumed, asks, problems }: Reading, expected: Expected): unknown {
   const codes = problems.map(({ code }) => code);
@@ -56,13 +67,15 @@ function wanted(expected: Expected): unknown {
   if (expected.problems.length > 0) return { problems: expected.problems };
   if (expected.intent === 'chat' || expected.intent === 'emergency')
     return { intent: expected.intent, fields: {} };
-  return { ...expected, fields: rounded(expected.fields) };
+  const { intent, fields, asks, problems } = expected;
+  return { intent, fields: rounded(fields), asks, problems };
 }
 
-/** What was read of a labelled message, beside what should have been. */
+/** What was read of a labelled message, beside what should have been: its fields, and what stands beside them. */
 export function judge({ language, text, expect }: Labelled): {
   readonly read: unknown;
   readonly wanted: unknown;
+  readonly beside: { readonly read: unknown; readonly wanted: unknown };
 } {
   const { readings, shared } = readMessage(text, { ...READER_DEFAULTS, language });
   const single = 'lines' in expect ? expect.lines : [expect];
@@ -70,5 +83,6 @@ export function judge({ language, text, expect }: Labelled): {
   return {
     read: { readings: read, shared: rounded(shared) },
     wanted: { readings: single.map(wanted), shared: 'lines' in expect ? rounded(expect.shared) : {} },
+    beside: { read: readings.map(besideOf), wanted: single.map(besideOf) },
   };
 }

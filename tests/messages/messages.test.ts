@@ -10,6 +10,7 @@ for (const file of [
   'en-marks.jsonl',
   'refused.en.jsonl',
   'emergency.jsonl',
+  'en-commands.jsonl',
 ]) {
   describe(`messages of ${file} are read as their labels say`, () => {
     test.each(labelledIn(file))('$id reads as it was meant: $text', (labelled) => {
@@ -18,3 +19,10 @@ for (const file of [
     });
   });
 }
+
+describe('the own words, statements, moments, lots and remarks of a message are read as its label says', () => {
+  test.each(labelledIn('en-commands.jsonl'))('$id reads as it was meant: $text', (labelled) => {
+    const { beside } = judge(labelled);
+    expect(beside.read).toEqual(beside.wanted);
+  });
+});

@@ -3,6 +3,8 @@ import type { FoldedText } from './fold-text.ts';
 import type { Grouping } from './numbers.ts';
 import { readDecimal, readNumeral } from './numbers.ts';
 import { concentrationLength } from './join-numbers.ts';
+import type { Piece } from './own-pieces.ts';
+import type { SaidWhen } from './command.ts';
 import type { Term } from './split-terms.ts';
 import { termIn } from './split-terms.ts';
 import type { FieldName, Fields, Marks, Place, ReadNote, ReaderSettings } from './understood.ts';
@@ -37,7 +39,41 @@ export interface Board {
   readonly marks: Marks;
   /** Whether the message says that something was added: past tense, neither negated nor conditional. */
   pastTense: boolean;
+  /** The terms as the bot's own words. */
+  readonly pieces: readonly Piece[];
+  /** The board is tried as a statement of something that happened to a vessel. */
+  readonly tells?: boolean;
+  /** The board is tried as an order for a vessel. */
+  readonly orders?: boolean;
+  /** A remark that was taken out of the terms. */
+  readonly remark?: string;
+  when?: SaidWhen;
+  /** The lot on an additive's label: its code, and the words that say so. */
+  chemicalLot?: { readonly code: string; readonly words: string };
 }
+
+/** The same terms with nothing claimed or found yet, for a reading that is only tried. */
+export const freshBoard = (
+  { message, folded, terms, cues, grouping, settings, pieces, remark }: Board,
+  tried: { readonly tells?: boolean; readonly orders?: boolean } = {},
+): Board => ({
+  message,
+  folded,
+  terms,
+  taken: [],
+  cues,
+  grouping,
+  settings,
+  pieces,
+  findings: [],
+  problems: [],
+  notes: [],
+  setAside: [],
+  marks: {},
+  pastTense: false,
+  ...(remark !== undefined && { remark }),
+  ...tried,
+});
 
 /** A finder or refiner: looks at the board and writes what it found. */
 export type Finder = (board: Board) => void;

@@ -47,6 +47,8 @@ export type Setting =
 export type Span =
   | { readonly is: 'month' } // this month
   | { readonly is: 'last-month' }
+  /** Without a year the last such month that has begun. */
+  | { readonly is: 'named-month'; readonly month: number; readonly year?: number }
   | { readonly is: 'year'; readonly year?: number } // without a year this one
   | { readonly is: 'last-year' }
   | { readonly is: 'between'; readonly from: SaidDay; readonly to: SaidDay }

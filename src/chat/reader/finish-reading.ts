@@ -116,6 +116,13 @@ function work(
     if (fields.rate_mg_L !== undefined && unknownVolume) asks.add('volume_L');
     return { assumed: { ...additive, ...base }, asks };
   }
+  if (intent === 'command' && draft.command?.name === 'order') {
+    if (fields.added_mg_L !== undefined && unknownVolume) asks.add('volume_L');
+    if (!isAmount(fields) && fields.added_mg_L === undefined && fields.rate_mg_L === undefined)
+      asks.add('mass_g');
+    askAdditive(draft, fields, asks);
+    return { assumed: { ...additive, ...base }, asks };
+  }
   if (intent === 'reading') {
     if (vesselless) asks.add('vessel');
     return { assumed: gallon, asks };

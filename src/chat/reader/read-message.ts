@@ -8,10 +8,12 @@ import { joinNumbers } from './join-numbers.ts';
 import { LEXICON } from './lexicon.ts';
 import { linesOf } from './lines.ts';
 import { groupingOf } from './message-language.ts';
+import { ownPieces } from './own-pieces.ts';
 import { readDraft } from './read-draft.ts';
 import { readRound } from './read-round.ts';
 import type { Term } from './split-terms.ts';
 import { splitTerms } from './split-terms.ts';
+import { takeRemark } from './take-remark.ts';
 import { isStrange, topicOf } from './topic.ts';
 import type { AwaitedField, Reading, ReaderSettings, Understood } from './understood.ts';
 import { readWaiting } from './waiting-answer.ts';
@@ -42,9 +44,10 @@ function cuesOf(terms: readonly Term[]): ReadonlySet<Tag> {
 export function setBoard(
   message: string,
   folded: FoldedText,
-  terms: readonly Term[],
+  said: readonly Term[],
   settings: ReaderSettings,
 ): Board {
+  const { terms, remark } = takeRemark(message, folded, said);
   return {
     message,
     folded,
@@ -59,6 +62,8 @@ export function setBoard(
     setAside: [],
     marks: {},
     pastTense: false,
+    pieces: ownPieces(terms),
+    ...(remark !== undefined && { remark }),
   };
 }
 

@@ -16,7 +16,12 @@ interface LineRead {
   readonly isPast: boolean;
   /** Figures in it that nothing could read. */
   readonly leftover: boolean;
+  /** What it says of when and with which lot, as the first line of all lines. */
+  readonly heading: Heading;
 }
+
+/** What the first line says of all lines beside their fields. */
+type Heading = Pick<Draft, 'when' | 'chemical_lot'>;
 
 /** A round: its readings and what the first line says of all. */
 export interface Round {
@@ -25,6 +30,21 @@ export interface Round {
 }
 
 type SetBoard = (terms: readonly Term[]) => Board;
+
+/** `12 Nov` above a list is its day; the name of a day alone may be that of the round. */
+function headingOf({ when, command }: Draft, board: Board): Heading {
+  const day = command?.name === 'day' ? command.day : undefined;
+  const moment = when ?? board.when ?? (day && { day, text: board.message.split('\n')[0]?.trim() ?? '' });
+  const isName =
+    moment?.hour === undefined &&
+    (moment?.day?.is === 'weekday' || moment?.day?.is === 'today') &&
+    when === undefined &&
+    board.when === undefined;
+  return {
+    ...(moment && !isName && { when: moment }),
+    ...(board.chemicalLot && { chemical_lot: board.chemicalLot.code }),
+  };
+}
 
 function readLine(terms: readonly Term[], setBoard: SetBoard): LineRead {
   const board = setBoard(terms);
@@ -40,7 +60,8 @@ function readLine(terms: readonly Term[], setBoard: SetBoard): LineRead {
       board.marks.barrelsCounted === true ||
       board.problems.some(({ code }) => code === 'volume-not-positive'),
     isPast: board.pastTense,
-    leftover: draft.intent === 'chat' && terms.some((_, i) => isFree(board, i)),
+    heading: headingOf(draft, board),
+    leftover: draft.intent === 'chat' && board.terms.some((_, i) => isFree(board, i)),
   };
 }
 
@@ -120,6 +141,30 @@ function readTogether(group: readonly LineRead[], setBoard: SetBoard, isPast: bo
   return readDraft(board);
 }
 
+/** The draft of a group. Among readings a line that tells only what a vessel is (`T5 red`) is a reading too. */
+function draftOf(
+  group: readonly LineRead[],
+  setBoard: SetBoard,
+  { isPast, isMixed }: { readonly isPast: boolean; readonly isMixed: boolean },
+): Draft {
+  const [line] = group as [LineRead];
+  if (group.length > 1 || isPast) return readTogether(group, setBoard, isPast);
+  return isMixed && line.draft.command?.name === 'told'
+    ? readDraft(setBoard(line.terms), { isNoTalk: true })
+    : line.draft;
+}
+
+/** When and with which lot, as the first line says, for a line that does not say it itself. */
+function withHeading(draft: Draft, { when, chemical_lot }: Heading): Draft {
+  if (draft.intent === 'effect') return draft;
+  const isNamed =
+    draft.when?.day !== undefined || draft.when?.hours_ago !== undefined || when?.hours_ago !== undefined;
+  const own = draft.when && when?.day && !isNamed ? { ...draft.when, day: when.day } : draft.when;
+  const moment = own ?? when;
+  const lot = draft.chemical_lot ?? (draft.intent === 'added' ? chemical_lot : undefined);
+  return { ...draft, ...(moment && { when: moment }), ...(lot !== undefined && { chemical_lot: lot }) };
+}
+
 /**
  * Reads several lines as a round of tanks: each vessel a reading, lines below it its own, the first line shared.
  *
@@ -140,12 +185,14 @@ export function readRound(
   const isPast = first.isPast && !opens(first);
   const isShared = !opens(first) && carriesFacts(first) && first.draft.problems.length === 0;
   const shared = isShared ? { ...first.draft, fields: sharedFields(first.draft.fields) } : undefined;
+  const heading = opens(first) ? {} : first.heading;
+  const isMixed = read.some((line) => opens(line) && line.draft.command === undefined);
   const readings = groupsOf(read, opens).map((group): Reading => {
     const [line] = group;
     if (!line) return notUnderstood(setBoard([]));
     if (line.leftover) return notUnderstood(setBoard(line.terms));
-    const draft = group.length === 1 && !isPast ? line.draft : readTogether(group, setBoard, isPast);
-    return finishReading(withShared(draft, shared), settings, shared?.fields);
+    const draft = draftOf(group, setBoard, { isPast, isMixed });
+    return finishReading(withHeading(withShared(draft, shared), heading), settings, shared?.fields);
   });
   return { readings, shared: shared?.fields ?? {} };
 }

@@ -19,7 +19,8 @@ const saysNo = (board: Board, i: number): boolean => [i - 1, i - 2, i - 3].some(
 const declines = (board: Board, i: number): boolean =>
   isCue(board, isCue(board, i - 1, 'to') ? i - 2 : i - 1, 'not');
 
-function isFact(board: Board, i: number): boolean {
+/** Whether the verb at term `i` tells what was done: neither asked, negated, conditional nor still to come. */
+export function isToldAsFact(board: Board, i: number): boolean {
   const first = board.terms.findIndex(({ kind }) => kind === 'word');
   const asks = first >= 0 && first < i && isCue(board, first, 'question');
   return (
@@ -44,7 +45,7 @@ export function findPastTense(board: Board): void {
       (isCue(board, i, 'past') || (isCue(board, i, 'put') && holdsCue(board, 'past-time'))),
   );
   if (said < 0 || declined) return;
-  board.pastTense = isFact(board, said);
+  board.pastTense = isToldAsFact(board, said);
   const negated = cueBetween(board, said - 5, said, 'not') || saysNo(board, said);
   if (negated) board.notes.push({ id: 'negated', text: '' });
 }

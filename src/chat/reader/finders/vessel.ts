@@ -129,6 +129,10 @@ function rangeEnd(board: Board, first: Named): { number: number; to: number } | 
     (isMark(board, k, '.') && isMark(board, k + 1, '.'));
   const isMinus = isMark(board, k, '-') && termAt(board, k).gap && board.terms[k + 1]?.gap === false;
   if (!joins || isMinus || first.number === undefined) return undefined;
+  // `moved T4 to T9`: out of one and into the other.
+  const isOne = !termAt(board, first.from).text.endsWith('s');
+  if (isOne && isCue(board, k, 'to') && board.pieces.some(({ ids }) => ids.includes('moved')))
+    return undefined;
   const at = isMark(board, k, '.') ? k + 2 : k + 1;
   const second = worded(board, at) ?? (board.terms[at]?.kind === 'word' ? coded(board, at) : undefined);
   if (second?.number !== undefined && second.kind === first.kind)

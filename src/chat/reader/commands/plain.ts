@@ -1,0 +1,69 @@
+import type { Command } from '../command.ts';
+import type { OwnWordId } from '../words/words.ts';
+import type { Talk } from './talk.ts';
+import { says, saysOnly } from './talk.ts';
+
+/** A way of saying a command that takes nothing but a vessel: the words it needs and those it may have beside them. */
+interface Form {
+  readonly command: Command;
+  readonly needs: readonly OwnWordId[];
+  readonly may?: readonly OwnWordId[];
+  readonly ofVessel?: boolean;
+}
+
+const FORMS: readonly Form[] = [
+  {
+    command: { name: 'vessel' },
+    needs: ['show'],
+    may: ['ask', 'of', 'on', 'is', 'in', 'wine', 'today'],
+    ofVessel: true,
+  },
+  { command: { name: 'vessel' }, needs: ['due'], may: ['ask', 'for', 'of', 'is'], ofVessel: true },
+  { command: { name: 'vessels' }, needs: ['vessels'], may: ['show', 'all', 'of'] },
+  { command: { name: 'history' }, needs: ['history'], may: ['show', 'of', 'for', 'sheet'], ofVessel: true },
+  {
+    command: { name: 'history' },
+    needs: ['what-was-added'],
+    may: ['to', 'for', 'today', 'yesterday'],
+    ofVessel: true,
+  },
+  { command: { name: 'undo' }, needs: ['undo'], may: ['last', 'entry', 'this'] },
+  { command: { name: 'open' }, needs: ['open'], may: ['orders', 'ask', 'show', 'is', 'still'] },
+  { command: { name: 'open' }, needs: ['orders'], may: ['show', 'all'] },
+  { command: { name: 'open' }, needs: ['open', 'orders'], may: ['ask', 'for', 'on', 'of'], ofVessel: true },
+  { command: { name: 'open' }, needs: ['orders'], may: ['show', 'for', 'on', 'of'], ofVessel: true },
+  { command: { name: 'due' }, needs: ['due'], may: ['ask', 'show', 'is', 'today', 'all', 'sheet', 'now'] },
+  { command: { name: 'unwatch' }, needs: ['unwatch'], may: ['of', 'for', 'on'], ofVessel: true },
+  { command: { name: 'watch' }, needs: ['watch'], may: ['of', 'again', 'on'], ofVessel: true },
+  { command: { name: 'watch' }, needs: ['remind', 'again'], may: ['of', 'on'], ofVessel: true },
+  { command: { name: 'settings' }, needs: ['settings'], may: ['show', 'all'] },
+  { command: { name: 'backup' }, needs: ['backup'], may: ['now', 'all'] },
+  { command: { name: 'forget-me' }, needs: ['forget-me'] },
+  { command: { name: 'forget' }, needs: ['forget'], ofVessel: true },
+];
+
+const fits = (talk: Talk, { needs, may = [], ofVessel = false }: Form): boolean =>
+  talk.isOfVessel === ofVessel &&
+  (ofVessel || talk.board.findings.length === 0) &&
+  needs.every((id) => says(talk, id)) &&
+  saysOnly(talk, [...needs, ...may]);
+
+/** `T4?`, `/T4`: nothing but the vessel. */
+const isVesselAlone = (talk: Talk): boolean =>
+  talk.isOfVessel && (talk.isQuestion || talk.isSlashed) && saysOnly(talk, []);
+
+/** `not T4`, in that order and alone. */
+const isNotVessel = ({ board, said, isOfVessel, isQuestion }: Talk): boolean =>
+  isOfVessel &&
+  !isQuestion &&
+  said.length === 1 &&
+  said[0]?.from === 0 &&
+  said[0].ids.includes('not') &&
+  board.findings[0]?.from === 1;
+
+/** Reads what takes nothing but a vessel: `T4?`, `vessels`, `undo`, `what is due`, `not T4`. */
+export function readPlain(talk: Talk): Command | undefined {
+  if (isVesselAlone(talk)) return { name: 'vessel' };
+  if (isNotVessel(talk)) return { name: 'unwatch' };
+  return FORMS.find((form) => fits(talk, form))?.command;
+}

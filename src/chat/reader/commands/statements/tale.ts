@@ -1,0 +1,100 @@
+import type { Board, Finding } from '../../board.ts';
+import { freshBoard, termAt } from '../../board.ts';
+import { findKind } from '../../finders/kind.ts';
+import { findStage } from '../../finders/stage.ts';
+import { findVessel } from '../../finders/vessel.ts';
+import { findVolume } from '../../finders/volume.ts';
+import { findWhen } from '../../finders/when.ts';
+import { LEXICON } from '../../lexicon.ts';
+import type { Piece } from '../../own-pieces.ts';
+import type { Term } from '../../split-terms.ts';
+import type { OwnWordId } from '../../words/words.ts';
+
+/** A piece of a statement: something found, or words. */
+export interface Item {
+  readonly finding?: Finding;
+  readonly piece: Piece;
+}
+
+/** A message as something told of a vessel: what was found in it, and the words between. */
+export interface Tale {
+  readonly board: Board;
+  readonly items: readonly Item[];
+}
+
+const GOES: ReadonlySet<OwnWordId> = new Set(['moved', 'racked', 'pumped', 'blended']);
+const FINDERS = [findStage, findWhen, findVessel, findVolume, findKind];
+
+const isStop = ({ kind, text, gap }: Piece): boolean =>
+  kind === 'break' || (kind === 'mark' && (/^[,.;:!=]$/.test(text) || (text === '-' && gap)));
+
+/** The pieces of the moment that was found: it is told, and no word of the statement. */
+function isOfMoment(board: Board, { from, to }: Piece): boolean {
+  const { when, folded } = board;
+  if (when === undefined) return false;
+  const [start, end] = [folded.at[termAt(board, from).start] ?? 0, folded.at[termAt(board, to).end] ?? 0];
+  const words = board.message.slice(start, end).trim();
+  return words.length > 0 && when.text.split(/\s+/).join(' ').includes(words.split(/\s+/).join(' '));
+}
+
+/** `moved T4 to T9` names two vessels and no six: where wine goes somewhere, "to" joins no range of single vessels. */
+function apart({ terms, pieces }: Board): readonly Term[] {
+  const goes = pieces.some(({ ids }) => ids.some((id) => GOES.has(id)));
+  const isMany = terms.some(
+    ({ text, tags }) => text.endsWith('s') && tags.some((tag) => tag.startsWith('vessel:')),
+  );
+  if (!goes || isMany) return terms;
+  return terms.map((term) => (term.tags.includes('cue:to') ? { ...term, tags: [] } : term));
+}
+
+/** A word that was mended may be another: nothing is told of a vessel by a slip. */
+const isMended = (board: Board, { field, from, to }: Finding): boolean =>
+  field !== 'volume_L' &&
+  board.terms
+    .slice(from, to + 1)
+    .some(({ text, tags }) => tags.length > 0 && !LEXICON.phrases.has(text.replaceAll('-', ' ')));
+
+/**
+ * Tries a message as something told of a vessel.
+ *
+ * @returns What was found and the words between; undefined where a figure or a question makes it something else.
+ */
+export function taleOf(board: Board): Tale | undefined {
+  const own: Board = { ...freshBoard(board, { tells: true }), terms: apart(board) };
+  for (const find of FINDERS) find(own);
+  const isOfVessel = own.findings.some(({ field }) => field === 'vessel' || field === 'vessels');
+  if (own.problems.length > 0 || !isOfVessel || own.findings.some((one) => isMended(own, one)))
+    return undefined;
+  const items: Item[] = [];
+  for (const piece of own.pieces) {
+    const finding = own.findings.find(({ from, to }) => piece.from >= from && piece.to <= to);
+    if (finding !== undefined) {
+      if (items.at(-1)?.finding !== finding) items.push({ finding, piece });
+    } else if (!isStop(piece) && !isOfMoment(own, piece)) items.push({ piece });
+  }
+  return { board: own, items };
+}
+
+/** Whether some word of the tale is one of those. */
+export const tells = ({ items }: Tale, ...ids: readonly OwnWordId[]): boolean =>
+  items.some(({ finding, piece }) => finding === undefined && piece.ids.some((id) => ids.includes(id)));
+
+/** Words that any statement may have: who, and that it is done. */
+const ANYWHERE: readonly OwnWordId[] = ['courtesy', 'article', 'who', 'done-to', 'now', 'at', 'on'];
+
+/** Whether every word of the tale is one of those, or may stand in any statement. */
+export const tellsOnly = ({ items }: Tale, ids: readonly OwnWordId[]): boolean =>
+  items.every(
+    ({ finding, piece }) =>
+      finding !== undefined || piece.ids.some((id) => ANYWHERE.includes(id) || ids.includes(id)),
+  );
+
+/** Whether nothing was found but those fields. */
+export const findsOnly = ({ board }: Tale, ...fields: readonly Finding['field'][]): boolean =>
+  board.findings.every(({ field }) => fields.includes(field));
+
+/** `is T4 empty`, `has T4 been racked`: a question without its mark. */
+export const asks = ({ items }: Tale): boolean =>
+  items[0]?.finding === undefined &&
+  items[0]?.piece.ids.some((id) => id === 'is' || id === 'has' || id === 'done-to') === true &&
+  items[1]?.finding !== undefined;

@@ -1,0 +1,29 @@
+import type { SaidDay } from '../command.ts';
+import type { Piece } from '../own-pieces.ts';
+import { isOwn } from '../own-pieces.ts';
+import { countAt, daysAt } from './count-at.ts';
+
+/** How long ago, and the last piece that says so. */
+export type AgoAt =
+  { readonly hours_ago: number; readonly to: number } | { readonly day: SaidDay; readonly to: number };
+
+/** So many days ago, as a day. */
+function dayAgo(days: number): SaidDay | undefined {
+  if (!Number.isInteger(days) || days < 1) return undefined;
+  if (days === 1) return { is: 'yesterday' };
+  return days === 2 ? { is: 'before-yesterday' } : { is: 'days-ago', days };
+}
+
+/** `2 hours ago`, `half an hour ago`, `30 min ago`, `3 days ago` at a piece. */
+export function agoAt(pieces: readonly Piece[], i: number): AgoAt | undefined {
+  const days = daysAt(pieces, i);
+  if (days) {
+    const day = isOwn(pieces, days.to + 1, 'ago') ? dayAgo(days.count) : undefined;
+    return day && { day, to: days.to + 1 };
+  }
+  const counted = countAt(pieces, i);
+  if (!counted || !isOwn(pieces, counted.to + 2, 'ago')) return undefined;
+  const unit = counted.to + 1;
+  const share = isOwn(pieces, unit, 'hour') ? 1 : isOwn(pieces, unit, 'minute') ? 1 / 60 : undefined;
+  return share === undefined ? undefined : { hours_ago: counted.count * share, to: unit + 1 };
+}
