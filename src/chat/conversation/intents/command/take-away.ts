@@ -52,6 +52,10 @@ function stretchOf(
       const before = addDays({ ...today, day: 1 }, -1);
       return { ...monthBounds(before, zone), span: `${before.year}-${two(before.month)}` };
     }
+    case 'named-month': {
+      const year = span.year ?? (span.month <= today.month ? today.year : today.year - 1);
+      return { ...monthBounds({ year, month: span.month }, zone), span: `${year}-${two(span.month)}` };
+    }
     case 'year':
       return { ...yearBounds(span.year ?? today.year, zone), span: String(span.year ?? today.year) };
     case 'last-year':
