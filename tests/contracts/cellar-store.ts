@@ -4,6 +4,7 @@ import { testEntryQueries } from './cellar-store/entry-queries.ts';
 import { testKeeping } from './cellar-store/keeping.ts';
 import { testLog } from './cellar-store/log.ts';
 import type { CreateStore } from './cellar-store/notes.ts';
+import { testMailbox } from './cellar-store/mailbox.ts';
 import { testPeople } from './cellar-store/people.ts';
 import { testProjection } from './cellar-store/projection.ts';
 import { testTurns } from './cellar-store/turns.ts';
@@ -28,6 +29,9 @@ export function testCellarStore(name: string, create: CreateStore, { anyLogs }: 
     });
     describe('hands out due things', () => {
       testDue(create);
+    });
+    describe('keeps what arrives and what is to be sent', () => {
+      testMailbox(create);
     });
     describe('derives vessels from the log', () => {
       testProjection(create, anyLogs);

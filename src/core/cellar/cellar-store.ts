@@ -1,4 +1,5 @@
 import type { LoggedEntry, NewEntry } from './entry.ts';
+import type { Mailbox, Post } from './mailbox.ts';
 import type { Vessel } from './vessel.ts';
 
 /** Somebody who notes things: a number in this cellar, and the name that is shown. */
@@ -60,8 +61,8 @@ export interface CellarView {
 /**
  * What a turn writes: all of it is kept or none. An entry whose key there is already, a correction of what is no entry,
  * is one itself or is taken back already, and a person whose id has another number are a RangeError: the conversation
- * has looked before. What is kept `until` a moment (milliseconds since 1970) lapses then. `said` also for what need not
- * be said any more.
+ * has looked before; so is something handled that does not wait to be. What is kept `until` a moment (milliseconds since
+ * 1970) lapses then. `said` also for what need not be said any more.
  */
 export type Write =
   | { readonly kind: 'entry'; readonly entry: NewEntry }
@@ -71,7 +72,10 @@ export type Write =
   /** The platform's id and the name go; the number and what it noted stay. */
   | { readonly kind: 'forget-person'; readonly number: number }
   | { readonly kind: 'due'; readonly due: Due }
-  | { readonly kind: 'said'; readonly id: string };
+  | { readonly kind: 'said'; readonly id: string }
+  | { readonly kind: 'post'; readonly post: Post }
+  /** What arrived needs nothing more; with a `cause` it was put aside, and what came is kept for a while. */
+  | { readonly kind: 'handled'; readonly channel: string; readonly number: number; readonly cause?: string };
 
 /** What the work of a turn comes to. */
 export interface TurnResult<T> {
@@ -88,7 +92,7 @@ export interface TakenDue extends Due {
  * Where cellars are kept: the log, what is derived from it, and what conversations keep. One port, several stores.
  * Every method rejects with a `StoreError` when the world fails, and then nothing of that call is kept.
  */
-export interface CellarStore {
+export interface CellarStore extends Mailbox {
   /**
    * Does a turn alone in its cellar. Resolves only when what it wrote (and all that it read) is durable. What `work`
    * throws it rejects with, and nothing is kept. A turn must not wait for another one of its cellar.

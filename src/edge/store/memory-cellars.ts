@@ -2,6 +2,7 @@ import type { CellarStore, CellarView, TakenDue } from '../../core/cellar/cellar
 import { createMemoryView } from './memory/memory-view.ts';
 import { createMemoryLedger } from './memory/memory-ledger.ts';
 import { emptyCellar, type DueKept, type MemoryCellar } from './memory/memory-cellar.ts';
+import { createMemoryMailbox, emptyMail } from './memory/memory-mail.ts';
 import { makeUndoable } from './memory/undoable.ts';
 import { writeToMemory } from './memory/write-to-memory.ts';
 import { rebuildVessels } from './projection/rebuild-vessels.ts';
@@ -20,6 +21,7 @@ const openFrom = ({ due, leased_until }: DueKept): number => Math.max(due.at, le
  */
 export function createMemoryCellars({ now }: { readonly now: () => number }): CellarStore {
   const cellars = new Map<string, MemoryCellar>();
+  const mail = emptyMail();
   const inTurn = makeTakeTurns();
   /** Cellars that are being written to at this moment. */
   const writing = new Map<string, Promise<void>>();
@@ -31,12 +33,13 @@ export function createMemoryCellars({ now }: { readonly now: () => number }): Ce
     );
 
   return {
+    ...createMemoryMailbox(mail),
     turn: (name, work) =>
       inTurn(name, async () => {
         const cellar = cellarOf(name);
         const { writes, result } = await work(createMemoryView(cellar, now));
         if (writes.length === 0) return result;
-        const written = writeToMemory(cellar, writes);
+        const written = writeToMemory(cellar, writes, { mail, now: now() });
         writing.set(
           name,
           written.catch(() => undefined),

@@ -2,22 +2,33 @@ import type { Write } from '../../../core/cellar/cellar-store.ts';
 import { noteEntries } from '../projection/note-entries.ts';
 import type { MemoryCellar } from './memory-cellar.ts';
 import { createMemoryLedger } from './memory-ledger.ts';
+import { writeMail, type MemoryMail } from './memory-mail.ts';
 import { makeUndoable, type Undoable } from './undoable.ts';
 
-/** Writes what a turn writes; where one of it cannot be kept, none is. */
-export async function writeToMemory(cellar: MemoryCellar, writes: readonly Write[]): Promise<void> {
+/** Writes what a turn writes; where one of it cannot be kept, none is. `now` is milliseconds since 1970. */
+export async function writeToMemory(
+  cellar: MemoryCellar,
+  writes: readonly Write[],
+  { mail, now }: { readonly mail: MemoryMail; readonly now: number },
+): Promise<void> {
   const change = makeUndoable();
   try {
     const entries = writes.flatMap((write) => (write.kind === 'entry' ? [write.entry] : []));
     await noteEntries(createMemoryLedger(cellar, change), entries);
-    for (const write of writes) writeOne(cellar, write, change);
+    for (const write of writes)
+      if (write.kind === 'post' || write.kind === 'handled') writeMail(mail, write, { change, now });
+      else writeOne(cellar, write, change);
   } catch (error) {
     change.undo();
     throw error;
   }
 }
 
-function writeOne(cellar: MemoryCellar, write: Write, change: Undoable): void {
+function writeOne(
+  cellar: MemoryCellar,
+  write: Exclude<Write, { kind: 'post' | 'handled' }>,
+  change: Undoable,
+): void {
   switch (write.kind) {
     case 'entry':
       return;

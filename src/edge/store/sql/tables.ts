@@ -1,3 +1,6 @@
+import type { Generated } from 'kysely';
+import type { Arrived, Post } from '../../../core/cellar/mailbox.ts';
+
 /** The tables, as the queries of Kysely know them. Times are milliseconds since 1970. */
 export interface Tables {
   readonly cellar: { readonly cellar: string };
@@ -18,6 +21,8 @@ export interface Tables {
     readonly name: string | null;
   };
   readonly due: DueRow;
+  readonly arrived: ArrivedRow;
+  readonly post: PostRow;
 }
 
 /** An entry; what it holds (its happening) is JSON. */
@@ -49,6 +54,18 @@ export interface DueRow {
   readonly leased_until: number;
   readonly open_at: number;
   readonly said: number;
+}
+
+/** Something that arrived; `handled_at` is null while it waits, `cause` unless it was put aside. */
+export interface ArrivedRow extends Arrived {
+  readonly tries: number;
+  readonly handled_at: number | null;
+  readonly cause: string | null;
+}
+
+/** Something to be sent; `place` gives the order. */
+export interface PostRow extends Post {
+  readonly place: Generated<number>;
 }
 
 interface PlaceRow {

@@ -3,7 +3,9 @@ import type { Write } from '../../../core/cellar/cellar-store.ts';
 import { noteEntries } from '../projection/note-entries.ts';
 import { keepDue, markSaid } from './due-things.ts';
 import { dropText, keepText } from './kept-texts.ts';
+import { markHandled } from './arrived-things.ts';
 import { keepPerson } from './people.ts';
+import { keepPost } from './posts.ts';
 import { createSqlLedger } from './sql-ledger.ts';
 import type { Tables } from './tables.ts';
 
@@ -41,6 +43,12 @@ export async function writeSet(
         break;
       case 'said':
         await markSaid(db, cellar, write.id);
+        break;
+      case 'post':
+        await keepPost(db, write.post);
+        break;
+      case 'handled':
+        await markHandled(db, write, now);
         break;
     }
   }

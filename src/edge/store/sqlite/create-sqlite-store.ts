@@ -4,6 +4,7 @@ import { rebuildVessels } from '../projection/rebuild-vessels.ts';
 import { leaseDue, readOpenDue } from '../sql/due-things.ts';
 import { createSqlLedger } from '../sql/sql-ledger.ts';
 import { createSqlView } from '../sql/sql-view.ts';
+import { createSqlMailbox } from '../sql/sql-mailbox.ts';
 import { writeSet } from '../sql/write-set.ts';
 import { StoreError } from '../store-error.ts';
 import { makeTakeTurns } from '../take-turns.ts';
@@ -40,7 +41,13 @@ export function createSqliteStore({ path, writer, reader, now, close }: SqlitePa
     return commits.write(work);
   };
 
+  const writeDurably = async (work: () => Promise<void>): Promise<void> => {
+    const batch = await write(work);
+    await batch.durable;
+  };
+
   return {
+    ...createSqlMailbox(db, writeDurably),
     look,
     cellars,
     backup,
@@ -83,13 +90,7 @@ export function createSqliteStore({ path, writer, reader, now, close }: SqlitePa
       return taken;
     },
 
-    rebuild: (cellar) =>
-      inTurn(cellar, () =>
-        rebuildVessels(createSqlLedger(db, cellar), async (work) => {
-          const batch = await write(work);
-          await batch.durable;
-        }),
-      ),
+    rebuild: (cellar) => inTurn(cellar, () => rebuildVessels(createSqlLedger(db, cellar), writeDurably)),
 
     close: async () => {
       await commits.settle();

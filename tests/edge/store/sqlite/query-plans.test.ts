@@ -3,6 +3,7 @@ import { expect, test } from 'vitest';
 import type { Write } from '../../../../src/core/cellar/cellar-store.ts';
 import { leaseDue, readNextDue, readOpenDue } from '../../../../src/edge/store/sql/due-things.ts';
 import { createSqlLedger } from '../../../../src/edge/store/sql/sql-ledger.ts';
+import { createSqlMailbox } from '../../../../src/edge/store/sql/sql-mailbox.ts';
 import { createSqlView } from '../../../../src/edge/store/sql/sql-view.ts';
 import { writeSet } from '../../../../src/edge/store/sql/write-set.ts';
 import { createKysely } from '../../../../src/edge/store/sqlite/create-kysely.ts';
@@ -43,7 +44,11 @@ async function askAll(connection: DatabaseSync): Promise<void> {
     { kind: 'forget-person', number: 1 },
     { kind: 'due', due },
     { kind: 'said', id: 'a' },
+    { kind: 'post', post: { id: 'a', channel: 'c', chat: '1', body: '{}', at: 1 } },
+    { kind: 'handled', channel: 'c', number: 1 },
   ];
+  const mailbox = createSqlMailbox(db, (work) => work());
+  await mailbox.receive([{ channel: 'c', number: 1, body: '{}', received_at: 1 }]);
   await writeSet(db, writes, { cellar: 'cellar 1', now: 0 });
   await Promise.all([view.nextEntry(), view.entry(1), view.entryOfKey('k'), view.entriesOfKeys('k')]);
   for (const vessel of [{}, { vessel: 'tank 4' }])
@@ -62,6 +67,8 @@ async function askAll(connection: DatabaseSync): Promise<void> {
     readOpenDue(db, 5, 5),
     leaseDue(db, { ...due, cellar: 'cellar 1' }, 5),
   ]);
+  await Promise.all([mailbox.waiting('c'), mailbox.countTry('c', [1]), mailbox.readdress('c', ['a'], '2')]);
+  await Promise.all([mailbox.settle('c', ['a']), mailbox.prune('c', { handled: 5, aside: 5, most: 5 })]);
   await ledger.countedOf('tank 4', { from: place, before: place });
   await Promise.all([
     ledger.counted(place, 5),

@@ -1,0 +1,90 @@
+import type { Kysely } from 'kysely';
+import type { Write } from '../../../core/cellar/cellar-store.ts';
+import type { Arrived, Mailbox, Waiting } from '../../../core/cellar/mailbox.ts';
+import { inParts } from './in-parts.ts';
+import type { Tables } from './tables.ts';
+
+/** Keeps what arrived; gives back what was not known. */
+export async function keepArrived(db: Kysely<Tables>, arrived: readonly Arrived[]): Promise<Arrived[]> {
+  const fresh = new Set<string>();
+  for (const part of inParts(arrived)) {
+    const rows = part.map(({ channel, number, body, received_at }) => {
+      return { channel, number, body, received_at, tries: 0, handled_at: null, cause: null };
+    });
+    const insert = db.insertInto('arrived').values(rows);
+    const kept = insert.onConflict((on) => on.doNothing()).returning(['channel', 'number']);
+    for (const row of await kept.execute()) fresh.add(nameOf(row));
+  }
+  // What stands twice in the list is new once.
+  return arrived.filter((one) => fresh.delete(nameOf(one)));
+}
+
+const nameOf = ({ channel, number }: Pick<Arrived, 'channel' | 'number'>): string => `${number} ${channel}`;
+
+/** What waits to be handled, the lowest number first. */
+export async function readWaiting(db: Kysely<Tables>, channel: string): Promise<Waiting[]> {
+  const query = db
+    .selectFrom('arrived')
+    .select(['channel', 'number', 'body', 'received_at', 'tries'])
+    .where('channel', '=', channel);
+  return query.where('handled_at', 'is', null).orderBy('number').execute();
+}
+
+/** Counts a try of each. */
+export async function countTries(
+  db: Kysely<Tables>,
+  channel: string,
+  numbers: readonly number[],
+): Promise<void> {
+  for (const part of inParts(numbers))
+    await db
+      .updateTable('arrived')
+      .set((eb) => ({ tries: eb('tries', '+', 1) }))
+      .where('channel', '=', channel)
+      .where('number', 'in', part)
+      .execute();
+}
+
+/**
+ * What arrived is handled; what it said goes, unless it is put aside.
+ *
+ * @throws RangeError where it does not wait
+ */
+export async function markHandled(
+  db: Kysely<Tables>,
+  { channel, number, cause }: Extract<Write, { kind: 'handled' }>,
+  now: number,
+): Promise<void> {
+  const done = { handled_at: now, ...(cause === undefined ? { body: '' } : { cause }) };
+  const update = db.updateTable('arrived').set(done).where('channel', '=', channel);
+  const { numUpdatedRows } = await update
+    .where('number', '=', number)
+    .where('handled_at', 'is', null)
+    .executeTakeFirst();
+  if (numUpdatedRows !== 1n) throw new RangeError(`${channel} ${number} does not wait to be handled`);
+}
+
+/** Forgets what was handled or put aside long ago, the oldest first. */
+export async function pruneArrived(
+  db: Kysely<Tables>,
+  channel: string,
+  { handled, aside, most }: Parameters<Mailbox['prune']>[1],
+): Promise<number> {
+  let gone = 0;
+  for (const [before, isAside] of [
+    [handled, false],
+    [aside, true],
+  ] as const) {
+    const old = db
+      .selectFrom('arrived')
+      .select('number')
+      .where('channel', '=', channel)
+      .where('handled_at', '<', before)
+      .where('cause', isAside ? 'is not' : 'is', null);
+    const numbers = (await old.orderBy('handled_at').limit(most).execute()).map(({ number }) => number);
+    for (const part of inParts(numbers))
+      await db.deleteFrom('arrived').where('channel', '=', channel).where('number', 'in', part).execute();
+    gone += numbers.length;
+  }
+  return gone;
+}
