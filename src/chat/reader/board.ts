@@ -48,6 +48,8 @@ export interface Board {
   /** A remark that was taken out of the terms. */
   readonly remark?: string;
   when?: SaidWhen;
+  /** The pieces that say when. */
+  ofWhen?: ReadonlySet<Piece>;
   /** The lot on an additive's label: its code, and the words that say so. */
   chemicalLot?: { readonly code: string; readonly words: string };
 }

@@ -1,5 +1,5 @@
 import type { Board } from '../board.ts';
-import { claim, freshBoard } from '../board.ts';
+import { claim, freshBoard, isFree } from '../board.ts';
 import { draftOfBoard } from '../draft-of-board.ts';
 import { runFinders } from '../run-finders.ts';
 import { isStranger } from '../stranger.ts';
@@ -35,10 +35,11 @@ export function readOrder(talk: Talk): Draft | undefined {
   const board: Board = { ...freshBoard(talk.board, { orders: true }), pastTense: true };
   claim(board, at, at);
   runFinders(board);
-  if (board.terms.some((_, i) => isStranger(board, i))) return undefined;
+  if (board.terms.some((_, i) => isStranger(board, i) || isFree(board, i))) return undefined;
   const draft = draftOfBoard(board, 'command');
   const names = Object.keys(draft.fields) as FieldName[];
   const isAmount = names.some((name) => AMOUNTS.has(name)) || board.problems.length > 0;
+  if (names.filter((name) => AMOUNTS.has(name)).length > 1) return undefined;
   if (!isAmount && !isBare(talk, board)) return undefined;
   if (!names.every((name) => ORDERED.has(name) || AMOUNTS.has(name))) return undefined;
   return { ...draft, command: { name: 'order' } };

@@ -9,6 +9,8 @@ interface Form {
   readonly needs: readonly OwnWordId[];
   readonly may?: readonly OwnWordId[];
   readonly ofVessel?: boolean;
+  /** It changes something: with a question mark it is none, unless it asks the bot to do it. */
+  readonly isAct?: true;
 }
 
 const FORMS: readonly Form[] = [
@@ -27,22 +29,24 @@ const FORMS: readonly Form[] = [
     may: ['to', 'for', 'today', 'yesterday'],
     ofVessel: true,
   },
-  { command: { name: 'undo' }, needs: ['undo'], may: ['last', 'entry', 'this'] },
+  { command: { name: 'history' }, needs: ['history-word'], may: ['show'] },
+  { command: { name: 'undo' }, needs: ['undo'], may: ['last', 'entry', 'this'], isAct: true },
   { command: { name: 'open' }, needs: ['open'], may: ['orders', 'ask', 'show', 'is', 'still'] },
   { command: { name: 'open' }, needs: ['orders'], may: ['show', 'all'] },
   { command: { name: 'open' }, needs: ['open', 'orders'], may: ['ask', 'for', 'on', 'of'], ofVessel: true },
   { command: { name: 'open' }, needs: ['orders'], may: ['show', 'for', 'on', 'of'], ofVessel: true },
   { command: { name: 'due' }, needs: ['due'], may: ['ask', 'show', 'is', 'today', 'all', 'sheet', 'now'] },
-  { command: { name: 'unwatch' }, needs: ['unwatch'], may: ['of', 'for', 'on'], ofVessel: true },
-  { command: { name: 'watch' }, needs: ['watch'], may: ['of', 'again', 'on'], ofVessel: true },
-  { command: { name: 'watch' }, needs: ['remind', 'again'], may: ['of', 'on'], ofVessel: true },
+  { command: { name: 'unwatch' }, needs: ['unwatch'], may: ['of', 'for', 'on'], ofVessel: true, isAct: true },
+  { command: { name: 'watch' }, needs: ['watch'], may: ['of', 'again', 'on'], ofVessel: true, isAct: true },
+  { command: { name: 'watch' }, needs: ['remind', 'again'], may: ['of', 'on'], ofVessel: true, isAct: true },
   { command: { name: 'settings' }, needs: ['settings'], may: ['show', 'all'] },
-  { command: { name: 'backup' }, needs: ['backup'], may: ['now', 'all'] },
-  { command: { name: 'forget-me' }, needs: ['forget-me'] },
-  { command: { name: 'forget' }, needs: ['forget'], ofVessel: true },
+  { command: { name: 'backup' }, needs: ['backup'], may: ['now', 'all'], isAct: true },
+  { command: { name: 'forget-me' }, needs: ['forget-me'], isAct: true },
+  { command: { name: 'forget' }, needs: ['forget'], ofVessel: true, isAct: true },
 ];
 
-const fits = (talk: Talk, { needs, may = [], ofVessel = false }: Form): boolean =>
+const fits = (talk: Talk, { needs, may = [], ofVessel = false, isAct }: Form): boolean =>
+  !(isAct && talk.isQuestion && !says(talk, 'request')) &&
   talk.isOfVessel === ofVessel &&
   (ofVessel || talk.board.findings.length === 0) &&
   needs.every((id) => says(talk, id)) &&

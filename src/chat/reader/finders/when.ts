@@ -128,5 +128,6 @@ export function findWhen(board: Board): void {
   const when = parts.length === 0 ? undefined : joined(board, parts);
   if (!when) return;
   board.when = when;
+  board.ofWhen = new Set(parts.flatMap(({ from, to }) => board.pieces.slice(from, to + 1)));
   for (const part of parts) if (part.isClaimed) claim(board, ...termsOf(board, part));
 }

@@ -535,6 +535,8 @@ export const en: Words = {
       'our', 'me', 'us', 'can you', 'could you', 'would you', 'will you', 'can i', 'can we', 'can i see', 'i want', 'i want to see',
       "i'd like", 'i would like', "let's", 'lets', 'let us', 'just', 'now', 'then', 'we', 'i', 'want', 'to see', 'get', 'and',
     ],
+    request: ['can you', 'could you', 'would you', 'will you', 'can i', 'can we', 'can i see'],
+    'history-word': ['history'],
     courtesy: ['please', 'pls', 'plz', 'thanks', 'thank you', 'thx', 'hi', 'hello', 'hey', 'ok', 'okay', 'fyi', 'update', 'good morning', 'morning'],
     article: ['the', 'a', 'an', 'my', 'our', 'this', 'all the'],
     if: ['if', 'what if', 'suppose', 'supposing', 'assuming', 'say i', 'say we', 'were to', 'had i', 'hypothetically', 'in case', 'imagine', "let's say", 'lets say'],

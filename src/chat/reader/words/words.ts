@@ -51,8 +51,8 @@ export type Tag =
  * `says`, so that none of them changes how a reading is read.
  */
 export type OwnWordId =
-  | 'filler' | 'courtesy' | 'article' | 'if' | 'ask' | 'show' | 'vessels' | 'today' | 'yesterday' | 'before-yesterday' | 'sheet' | 'what-was-added'
-  | 'history' | 'undo' | 'strike' | 'entry' | 'because' | 'order' | 'orders' | 'open' | 'still' | 'due' | 'later' | 'tomorrow' | 'next-week'
+  | 'filler' | 'request' | 'courtesy' | 'article' | 'if' | 'ask' | 'show' | 'vessels' | 'today' | 'yesterday' | 'before-yesterday' | 'sheet' | 'what-was-added'
+  | 'history' | 'history-word' | 'undo' | 'strike' | 'entry' | 'because' | 'order' | 'orders' | 'open' | 'still' | 'due' | 'later' | 'tomorrow' | 'next-week'
   | 'remind' | 'again' | 'not' | 'unwatch' | 'watch' | 'settings' | 'export' | 'import' | 'backup' | 'forget'
   | 'forget-me' | 'this' | 'last' | 'month' | 'year' | 'all' | 'csv' | 'xlsx'
   | 'work-in' | 'units' | 'metric' | 'litres' | 'us' | 'imperial' | 'gallons' | 'usual' | 'usual-bare' | 'default' | 'target' | 'target-kind'

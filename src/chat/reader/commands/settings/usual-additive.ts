@@ -19,6 +19,9 @@ const isOpened = (talk: Talk): boolean =>
   (says(talk, 'usual-bare') &&
     (says(talk, 'is') || talk.board.terms.some(({ text }) => text === ':' || text === '=')));
 
+const openerOf = ({ said }: Talk): number =>
+  said.find(({ ids }) => ids.includes('usual') || ids.includes('usual-bare'))?.from ?? 0;
+
 /** `potassium metabisulfite, 57%`: nothing else is said, so the per cent is its own. */
 const commasAsColons = (board: Board): Board => ({
   ...board,
@@ -41,9 +44,12 @@ export function readUsualAdditive(talk: Talk): Command | undefined {
   );
   if (named.length === 0 || !isNamed(board)) return undefined;
   const additive = findingOf(board, 'additive')?.value;
-  if (additive === undefined || board.problems.length > 0 || board.marks.unnamedAdditive)
+  const isFirst = named.every(({ from }) => from > openerOf(talk));
+  if (!isFirst || rest.some(({ kind }) => kind === 'number')) return undefined;
+  if (additive === undefined || board.marks.unnamedAdditive)
     return rest.length <= 2 ? setWrong(talk, 'usual-additive', named) : undefined;
   if (rest.length > 0) return undefined;
+  if (board.problems.length > 0) return setWrong(talk, 'usual-additive', named);
   const strength_percent = findingOf(board, 'strength_percent')?.value;
   return set({
     of: 'usual-additive',

@@ -1,4 +1,4 @@
-import { placeOf } from '../../board.ts';
+import { placeOf, termAt } from '../../board.ts';
 import type { Command } from '../../command.ts';
 import type { Piece } from '../../own-pieces.ts';
 import type { Talk } from '../talk.ts';
@@ -13,6 +13,12 @@ const AREAS =
 const MOST_WORDS = 4;
 
 const isOwnWord = ({ ids }: Piece): boolean => ids.some((id) => id !== 'us');
+const isStop = ({ ids }: Piece): boolean =>
+  ids.some((id) => id === 'now' || id === 'filler' || id === 'tomorrow' || id === 'not');
+
+/** A piece of a place's name: no figure of its own, and no word of a wine. */
+const isOfPlace = ({ board }: Talk, { kind, gap, from }: Piece): boolean =>
+  kind === 'number' ? !gap : termAt(board, from).tags.every((tag) => tag.startsWith('cue:'));
 
 /** Reads `time zone Europe/Madrid`, `we are in Europe/Madrid`, `timezone UTC`; whether there is such a zone is not looked up. */
 export function readZone(talk: Talk): Command | undefined {
@@ -21,9 +27,12 @@ export function readZone(talk: Talk): Command | undefined {
   const opener = talk.said.findLastIndex(({ ids }) => ids.includes('zone') || ids.includes('we-are-in'));
   const before = talk.said.slice(0, opener);
   const behind = talk.said.slice(opener + 1).filter(({ ids }) => !ids.includes('is'));
-  const end = behind.findIndex(({ ids }) => ids.includes('now') || ids.includes('filler'));
+  const end = behind.findIndex(isStop);
   const place = end < 0 ? behind : behind.slice(0, end);
-  const isAlone = [...before, ...behind.slice(place.length)].every(({ ids }) => ids.length > 0);
+  const isAlone =
+    before.every(({ ids }) => ids.includes('filler') || ids.includes('work-in')) &&
+    behind.slice(place.length).every(({ ids }) => ids.includes('now') || ids.includes('filler')) &&
+    place.every((piece) => isOfPlace(talk, piece));
   if (place.length === 0 || !isAlone || place.length > MOST_WORDS * 2 + 2) return undefined;
   if (place.length === 1 && place[0]?.ids.includes('utc'))
     return isNamed ? set({ of: 'zone', zone: 'UTC' }) : undefined;

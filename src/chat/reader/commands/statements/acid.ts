@@ -9,7 +9,11 @@ export function readAcid(tale: Tale): Command | undefined {
   if (!findsOnly(tale, 'vessel', 'vessels')) return undefined;
   const isSaid = tells(tale, 'acidified') || (tells(tale, 'went-in') && tells(tale, 'acid'));
   const { board, items } = tale;
-  const isReached = ({ piece }: Item): boolean => piece.kind === 'number' && isPhLike(board, piece.from);
+  const isReached = ({ piece }: Item, k: number): boolean =>
+    piece.kind === 'number' &&
+    isPhLike(board, piece.from) &&
+    items[k - 1]?.finding === undefined &&
+    items[k - 1]?.piece.ids.includes('to') === true;
   const reached = tells(tale, 'acidified') ? items.filter(isReached) : [];
   const words = { board, items: items.filter((item) => !reached.includes(item)) };
   if (!isSaid || !tellsOnly(words, ['acidified', 'went-in', 'acid', 'to', 'in', 'some'])) return undefined;

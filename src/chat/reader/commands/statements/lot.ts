@@ -72,7 +72,8 @@ export function readLot(board: Board): Draft | undefined {
   while (to >= 0 && (termAt(own, to).kind === 'break' || /^[.!,]$/.test(termAt(own, to).text))) to--;
   if (!name || !isLot(own, name.from, to, name.isWorded)) return undefined;
   const lot = wordsOf(own, name.from, to);
-  if (lot.length > MOST_LETTERS) return undefined;
+  const isToCome = own.pieces.some(({ ids }) => ids.includes('tomorrow') || ids.includes('next-week'));
+  if (lot.length > MOST_LETTERS || isToCome) return undefined;
   own.findings.splice(0, own.findings.length, vessel);
   const command: Command = { name: 'lot', lot };
   return { ...draftOfBoard(own, 'command'), command };

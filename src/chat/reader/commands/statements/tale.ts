@@ -1,5 +1,5 @@
 import type { Board, Finding } from '../../board.ts';
-import { freshBoard, termAt } from '../../board.ts';
+import { freshBoard } from '../../board.ts';
 import { findKind } from '../../finders/kind.ts';
 import { findStage } from '../../finders/stage.ts';
 import { findVessel } from '../../finders/vessel.ts';
@@ -28,15 +28,6 @@ const FINDERS = [findStage, findWhen, findVessel, findVolume, findKind];
 const isStop = ({ kind, text, gap }: Piece): boolean =>
   kind === 'break' || (kind === 'mark' && (/^[,.;:!=]$/.test(text) || (text === '-' && gap)));
 
-/** The pieces of the moment that was found: it is told, and no word of the statement. */
-function isOfMoment(board: Board, { from, to }: Piece): boolean {
-  const { when, folded } = board;
-  if (when === undefined) return false;
-  const [start, end] = [folded.at[termAt(board, from).start] ?? 0, folded.at[termAt(board, to).end] ?? 0];
-  const words = board.message.slice(start, end).trim();
-  return words.length > 0 && when.text.split(/\s+/).join(' ').includes(words.split(/\s+/).join(' '));
-}
-
 /** `moved T4 to T9` names two vessels and no six: where wine goes somewhere, "to" joins no range of single vessels. */
 function apart({ terms, pieces }: Board): readonly Term[] {
   const goes = pieces.some(({ ids }) => ids.some((id) => GOES.has(id)));
@@ -54,6 +45,13 @@ const isMended = (board: Board, { field, from, to }: Finding): boolean =>
     .slice(from, to + 1)
     .some(({ text, tags }) => tags.length > 0 && !LEXICON.phrases.has(text.replaceAll('-', ' ')));
 
+const saysTwoVolumes = ({ findings }: Board): boolean =>
+  new Set(findings.flatMap(({ field, value }) => (field === 'volume_L' ? [value] : []))).size > 1;
+
+/** `T4 in malo tomorrow` states nothing yet. */
+const isToCome = ({ pieces }: Board): boolean =>
+  pieces.some(({ ids }) => ids.includes('tomorrow') || ids.includes('next-week'));
+
 /**
  * Tries a message as something told of a vessel.
  *
@@ -63,14 +61,14 @@ export function taleOf(board: Board): Tale | undefined {
   const own: Board = { ...freshBoard(board, { tells: true }), terms: apart(board) };
   for (const find of FINDERS) find(own);
   const isOfVessel = own.findings.some(({ field }) => field === 'vessel' || field === 'vessels');
-  if (own.problems.length > 0 || !isOfVessel || own.findings.some((one) => isMended(own, one)))
-    return undefined;
+  const isUnclear = own.problems.length > 0 || own.findings.some((one) => isMended(own, one));
+  if (!isOfVessel || isUnclear || saysTwoVolumes(own) || isToCome(own)) return undefined;
   const items: Item[] = [];
   for (const piece of own.pieces) {
     const finding = own.findings.find(({ from, to }) => piece.from >= from && piece.to <= to);
     if (finding !== undefined) {
       if (items.at(-1)?.finding !== finding) items.push({ finding, piece });
-    } else if (!isStop(piece) && !isOfMoment(own, piece)) items.push({ piece });
+    } else if (!isStop(piece) && own.ofWhen?.has(piece) !== true) items.push({ piece });
   }
   return { board: own, items };
 }
