@@ -41,6 +41,7 @@ const BARE = new Set([
   'next',
   'place',
   'rows',
+  'tries',
   'columns',
   'position',
   'at', // a time in milliseconds since 1970, as in every `…At`

@@ -49,11 +49,11 @@ export interface Mailbox {
   /** Gives posts another chat: it has got another name. */
   readdress(channel: string, ids: readonly string[], chat: string): Promise<void>;
   /**
-   * Forgets what was handled before `handled` and what was put aside before `aside` (milliseconds since 1970), at most
+   * Forgets what was handled before `handled_at` and what was put aside before `aside_at` (milliseconds since 1970), at most
    * `most` of each. Gives back how many.
    */
   prune(
     channel: string,
-    before: { readonly handled: number; readonly aside: number; readonly most: number },
+    before: { readonly handled_at: number; readonly aside_at: number; readonly most: number },
   ): Promise<number>;
 }

@@ -125,11 +125,11 @@ export function testMailbox(create: CreateStore): void {
     now = 200;
     await write(store, handled(3));
     await write(store, handled(4));
-    expect(await store.prune('here', { handled: 100, aside: 100, most: 9 })).toBe(0);
-    expect(await store.prune('here', { handled: 150, aside: 100, most: 9 })).toBe(1);
-    expect(await store.prune('there', { handled: 999, aside: 999, most: 9 })).toBe(0);
-    expect(await store.prune('here', { handled: 999, aside: 100, most: 1 })).toBe(1);
-    expect(await store.prune('here', { handled: 999, aside: 999, most: 9 })).toBe(2);
+    expect(await store.prune('here', { handled_at: 100, aside_at: 100, most: 9 })).toBe(0);
+    expect(await store.prune('here', { handled_at: 150, aside_at: 100, most: 9 })).toBe(1);
+    expect(await store.prune('there', { handled_at: 999, aside_at: 999, most: 9 })).toBe(0);
+    expect(await store.prune('here', { handled_at: 999, aside_at: 100, most: 1 })).toBe(1);
+    expect(await store.prune('here', { handled_at: 999, aside_at: 999, most: 9 })).toBe(2);
     expect(await waiting(store)).toEqual([5]);
     await store.close();
   });

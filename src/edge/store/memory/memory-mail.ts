@@ -52,10 +52,10 @@ export function createMemoryMailbox({ arrived: all, posts }: MemoryMail): Mailbo
         if (post !== undefined) posts.set(key, { ...post, chat });
       }
     },
-    prune: async (channel, { handled, aside, most }) => {
+    prune: async (channel, { handled_at: handledBefore, aside_at: asideBefore, most }) => {
       const ended = arrivedOf(channel).sort((one, other) => (one.handled_at ?? 0) - (other.handled_at ?? 0));
       const isOld = ({ handled_at = Infinity, cause }: ArrivedKept, isAside: boolean): boolean =>
-        (cause !== undefined) === isAside && handled_at < (isAside ? aside : handled);
+        (cause !== undefined) === isAside && handled_at < (isAside ? asideBefore : handledBefore);
       const gone = [false, true].flatMap((isAside) =>
         ended.filter((one) => isOld(one, isAside)).slice(0, most),
       );

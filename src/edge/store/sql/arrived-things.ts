@@ -68,12 +68,12 @@ export async function markHandled(
 export async function pruneArrived(
   db: Kysely<Tables>,
   channel: string,
-  { handled, aside, most }: Parameters<Mailbox['prune']>[1],
+  { handled_at, aside_at, most }: Parameters<Mailbox['prune']>[1],
 ): Promise<number> {
   let gone = 0;
   for (const [before, isAside] of [
-    [handled, false],
-    [aside, true],
+    [handled_at, false],
+    [aside_at, true],
   ] as const) {
     const old = db
       .selectFrom('arrived')
