@@ -1,15 +1,22 @@
 import { z } from 'zod';
 import { LANGUAGES } from '../languages.ts';
 
+/** Names become part of an entry's key, which has a bound; control letters count as they are written there. */
+const LONGEST_NAME = 80;
+
+const NAME = z
+  .union([z.string(), z.number()])
+  .refine((name) => JSON.stringify(String(name)).length <= LONGEST_NAME, 'longer than a name may be');
+
 const INPUT = z
   .object({
-    id: z.union([z.string(), z.number()]).nullish(),
+    id: NAME.nullish(),
     language: z.enum(LANGUAGES).optional(),
     text: z.string().optional(),
     press: z.string().optional(),
     tick: z.literal(true).optional(),
-    chat: z.union([z.string(), z.number()]).optional(),
-    person: z.union([z.string(), z.number()]).optional(),
+    chat: NAME.optional(),
+    person: NAME.optional(),
     at: z.iso.datetime({ offset: true, local: true }).optional(),
   })
   .refine(

@@ -4,6 +4,7 @@ import type { AdditiveId } from '../../core/additives/additive-id.ts';
 import { DEFAULT_SETTINGS, withUnits, type Settings } from '../../chat/conversation/settings.ts';
 import { OperatorError } from '../operator-error.ts';
 import { isLanguage, LANGUAGES } from '../languages.ts';
+import type { KeptPart } from './kept-lines.ts';
 
 /** What the command line asks for. */
 export interface AskOptions {
@@ -11,15 +12,20 @@ export interface AskOptions {
   /** The message, where it stands on the command line. */
   readonly text: string;
   readonly settings: Settings;
+  /** The cellar's file; absent: nothing is kept. */
+  readonly data?: string;
+  /** What of the file is to be printed, in place of answers. */
+  readonly print?: KeptPart;
   /** Options that are accepted, but that this version does nothing with. */
   readonly notServedYet: readonly string[];
 }
 
 const USAGE = `npm run -s ask -- "T4 1450 gal pH 3.58 free 21"
 npm run -s ask -- --jsonl < messages.jsonl
-options: --language ${LANGUAGES.join('|')}  --basis pk-1.81|oiv  --additive NAME  --units metric|us|imperial`;
+npm run -s ask -- --data FILE --log, or --vessels
+options: --data FILE --language ${LANGUAGES.join('|')}  --basis pk-1.81|oiv  --additive NAME  --units metric|us|imperial`;
 
-const NOT_SERVED_YET = ['region', 'data', 'log', 'vessels'] as const;
+const NOT_SERVED_YET = ['region'] as const;
 const UNITS = ['metric', 'us', 'imperial'] as const;
 const BASES = ['pk-1.81', 'oiv'] as const;
 
@@ -68,8 +74,15 @@ export function readOptions(args: readonly string[]): AskOptions {
   const text = positionals.join(' ');
   const notServedYet = NOT_SERVED_YET.filter((name) => values[name] !== undefined).map((name) => `--${name}`);
   const jsonl = values.jsonl ?? false;
-  if (jsonl === (text.trim() !== '') && !(values.log ?? values.vessels))
-    throw new OperatorError(`One message, or --jsonl and messages on stdin.\n${USAGE}`);
+  const asked = [text.trim() !== '', jsonl, values.log, values.vessels].filter(Boolean);
+  if (asked.length !== 1)
+    throw new OperatorError(
+      `One of these: a message, --jsonl with messages on stdin, --log or --vessels.\n${USAGE}`,
+    );
+  const { data } = values;
+  const print = values.log ? 'log' : values.vessels ? 'vessels' : undefined;
+  if (data?.trim() === '' || (print !== undefined && data === undefined))
+    throw new OperatorError(`--data must name the cellar's file.\n${USAGE}`);
   if (values.language !== undefined && !isLanguage(values.language))
     throw new OperatorError(`--language must be one of ${LANGUAGES.join(', ')}.`);
   const basis = oneOf('basis', values.basis, BASES);
@@ -81,5 +94,12 @@ export function readOptions(args: readonly string[]): AskOptions {
     ...(basis !== undefined && { basis }),
     ...(additive !== undefined && { usualAdditive: additive }),
   };
-  return { jsonl, text, settings, notServedYet };
+  return {
+    jsonl,
+    text,
+    settings,
+    notServedYet,
+    ...(data !== undefined && { data }),
+    ...(print !== undefined && { print }),
+  };
 }

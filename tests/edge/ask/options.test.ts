@@ -21,11 +21,16 @@ test.each([
 });
 
 test('options that cannot be served yet are accepted and named', () => {
-  expect(readOptions(['--region', 'eu', '--data', 'cellar.db', 'hi']).notServedYet).toEqual([
-    '--region',
-    '--data',
-  ]);
-  expect(readOptions(['--data', 'cellar.db', '--log']).notServedYet).toEqual(['--data', '--log']);
+  expect(readOptions(['--region', 'eu', 'hi']).notServedYet).toEqual(['--region']);
+});
+
+test.each([
+  [['--data', 'a.db', 'hi'], { data: 'a.db', text: 'hi' }],
+  [['--data=a.db', '--jsonl'], { data: 'a.db', jsonl: true }],
+  [['--data', 'a.db', '--log'], { data: 'a.db', print: 'log' }],
+  [['--vessels', '--data', 'a.db'], { data: 'a.db', print: 'vessels' }],
+])('a file is answered on, or printed: %j', (args, options) => {
+  expect(readOptions(args)).toMatchObject(options);
 });
 
 test.each([
@@ -37,6 +42,12 @@ test.each([
   [['--language']],
   [[]],
   [['--jsonl', 'hi']],
+  [['--data', 'a.db']],
+  [['--data', ' ', 'hi']],
+  [['--log']],
+  [['--data', 'a.db', '--log', '--vessels']],
+  [['--data', 'a.db', '--log', 'hi']],
+  [['--data', 'a.db', '--jsonl', '--vessels']],
 ])('what there is not is refused with a sentence: %j', (args) => {
   expect(() => readOptions(args)).toThrow(OperatorError);
 });

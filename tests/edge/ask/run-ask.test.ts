@@ -1,6 +1,10 @@
 import { spawnSync } from 'node:child_process';
+import { existsSync, mkdtempSync, rmSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
 import { PassThrough, Readable } from 'node:stream';
-import { expect, test } from 'vitest';
+import { afterEach, beforeEach, describe, expect, test } from 'vitest';
+import { openSqliteStore } from '../../../src/edge/store/sqlite/open-sqlite-store.ts';
 import { runAsk } from '../../../src/edge/ask/run-ask.ts';
 
 async function ask(
@@ -53,6 +57,98 @@ test('every line is answered in its order, a broken one in its place', async () 
 test('the language of the run holds for lines that name none', async () => {
   const { out } = await ask(['--jsonl', '--language', 'de'], '{"id":1,"text":"T4 40 hl pH 3,4 frei 15"}\n');
   expect(JSON.parse(out)).toMatchObject({ understood: [{ fields: { ph: 3.4, free_mg_L: 15 } }] });
+});
+
+describe('on a file', () => {
+  let folder: string;
+  let data: string;
+
+  beforeEach(() => {
+    folder = mkdtempSync(join(tmpdir(), 'ask-'));
+    data = join(folder, 'cellar.db');
+  });
+
+  afterEach(() => rmSync(folder, { recursive: true }));
+
+  const logged = async (): Promise<unknown[]> => {
+    const { status, out } = await ask(['--data', data, '--log']);
+    expect(status).toBe(0);
+    return out
+      .split('\n')
+      .filter((line) => line !== '')
+      .map((line) => JSON.parse(line) as unknown);
+  };
+
+  test('what is said is noted, and printed by the log', async () => {
+    expect(await ask(['--data', data, 'added 137 g kmbs T12'])).toMatchObject({
+      status: 0,
+      out: expect.stringContaining('137 g') as string,
+      told: [],
+    });
+    const line =
+      '{"chat":"c","id":1,"person":"Ana","at":"2026-10-05T13:00:00Z","text":"added 9 g kmbs T1"}\n';
+    await ask(['--data', data, '--jsonl'], line + line);
+    await ask(['--data', data, '--jsonl'], line);
+    expect(await logged()).toEqual([
+      expect.objectContaining({ entry: 1, vessel: 'tank 12', mass_g: 137, by: 'person 1' }),
+      expect.objectContaining({
+        entry: 2,
+        vessel: 'tank 1',
+        mass_g: 9,
+        at: '2026-10-05T13:00:00+00:00',
+        by: 'Ana',
+      }),
+    ]);
+    const { out } = await ask(['--data', data, '--vessels']);
+    expect(out).toMatch(/^\{"vessel":"tank 1",.*\n\{"vessel":"tank 12",.*\n$/);
+  });
+
+  test('a question waits in its chat from one run to the next', async () => {
+    const say = (text: string) => ask(['--data', data, '--jsonl'], JSON.stringify({ chat: 'c', text }));
+    await say('T4 pH 3.5 free 20');
+    expect((await say('40 hl')).out).toContain('"measure":{"value":139,"unit":"g"}');
+  });
+
+  test('it is read beside a program that writes to it, and written by one at a time', async () => {
+    const writer = await openSqliteStore(data, { now: () => 0, report: () => undefined });
+    try {
+      expect(await logged()).toEqual([]);
+      const { status, out, told } = await ask(['--data', data, 'added 137 g kmbs T12']);
+      expect([status, out, told]).toEqual([
+        78,
+        '',
+        [expect.stringMatching(/^Another brimnote is writing to /)],
+      ]);
+    } finally {
+      await writer.close();
+    }
+    expect(await logged()).toEqual([]);
+  });
+
+  test.each(['--log', '--vessels'])(
+    '%s of a file that there is not says so, and makes none',
+    async (option) => {
+      const { status, told } = await ask(['--data', data, option]);
+      expect([status, told]).toEqual([78, [`There is no cellar file ${data}: check --data.`]]);
+      expect(existsSync(data)).toBe(false);
+    },
+  );
+
+  test('the terminal writes what the log prints', () => {
+    const options = { encoding: 'utf8', env: { DATA_FILE: data, USER: 'rosa' } } as const;
+    const run = (program: string, args: string[], input = '') =>
+      spawnSync(process.execPath, [program, ...args], { ...options, input });
+    expect(run('src/main.ts', [], 'added 137 g kmbs T12\n').status).toBe(0);
+    const { status, stdout } = run('src/ask.ts', ['--data', data, '--log']);
+    expect(status).toBe(0);
+    expect(JSON.parse(stdout)).toMatchObject({
+      entry: 1,
+      kind: 'addition',
+      vessel: 'tank 12',
+      mass_g: 137,
+      by: 'rosa',
+    });
+  });
 });
 
 test('the program itself answers, and ends with the status', () => {
