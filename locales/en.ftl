@@ -794,24 +794,24 @@ fact-capacity = holds { $volume }
 fact-lot = { $lot }
 event-said =
     { $event ->
-        [racked] racked
-        [topped] topped
-        [acid] acid added
+        [racked] { " " }racked
+        [topped] { " " }topped
+        [acid] { " " }acid added
         [moved] { $whole ->
-            [part] moved in part to { $to }
-           *[all] moved to { $to }
+            [part] { " " }moved in part to { $to }
+           *[all] { " " }moved to { $to }
         }
         [blended] { $whole ->
-            [part] blended in part into { $to }
-           *[all] blended into { $to }
+            [part] { " " }blended in part into { $to }
+           *[all] { " " }blended into { $to }
         }
-        [emptied] empty
-        [lot] is { $lot }
-        [later] check later
-        [unwatched] no more checks
-        [watched] checks again
-        [forgotten] forgotten
-       *[told] is
+        [emptied] { " " }empty
+        [lot] { " " }is { $lot }
+        [later] , no check before { $until }
+        [unwatched] , no more checks
+        [watched] , checks again
+        [forgotten] { " " }forgotten
+       *[told] :
     }
 entry-addition =
     { $vessel } { $known ->
@@ -827,7 +827,11 @@ entry-order =
        *[some] { $list }
     }
 entry-reading = { $vessel } { $list }
-entry-vessel = { $vessel } { event-said } { $list }
+entry-vessel =
+    { $vessel }{ event-said }{ $told ->
+        [none] { "" }
+       *[some] { " " }{ $list }
+    }
 entry-other = { $vessel } { $text } (not calculated)
 entry-stock = { $text }
 entry-correction =

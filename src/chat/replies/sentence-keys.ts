@@ -173,9 +173,9 @@ export interface SentenceValues {
   'entry-other': 'text' | 'vessel';
   'entry-reading': 'list' | 'vessel';
   'entry-stock': 'text';
-  'entry-vessel': 'event' | 'list' | 'lot' | 'to' | 'vessel' | 'whole';
+  'entry-vessel': 'event' | 'list' | 'lot' | 'to' | 'told' | 'until' | 'vessel' | 'whole';
   'errand-failed': never;
-  'event-said': 'event' | 'lot' | 'to' | 'whole';
+  'event-said': 'event' | 'lot' | 'to' | 'until' | 'whole';
   'export-SO2_g': never;
   'export-added_mg_L': never;
   'export-additive': never;

@@ -1,18 +1,20 @@
 import type { Entry, LoggedEntry, VesselChange } from '../../../core/cellar/entry.ts';
+import { dayText } from '../../replies/moment-text.ts';
 import { numberText, type DecimalMark } from '../../replies/number-text.ts';
 import { concentrationText } from '../../replies/quantity-text.ts';
 import type { Line } from '../../replies/reply.ts';
 import { vesselName, vesselNames } from '../../replies/vessel-name.ts';
 import { volumeText } from '../../replies/volume-text.ts';
 import type { Here } from '../here.ts';
+import { tellingOf } from '../telling.ts';
 import { part } from './line.ts';
 import { notedAmount } from './noted-amount.ts';
 
 type Part = Omit<Line, 'room'>;
 
 /** What an entry holds, as one part of a line: vessel, what, how much. */
-export function entryPart(entry: LoggedEntry, { settings, memory }: Pick<Here, 'settings' | 'memory'>): Part {
-  const mark = memory.decimalMark ?? '.';
+export function entryPart(entry: LoggedEntry, here: Pick<Here, 'settings' | 'memory' | 'message'>): Part {
+  const mark = here.memory.decimalMark ?? '.';
   const vessel = vesselNames(entry.vessels);
   switch (entry.kind) {
     case 'addition':
@@ -25,11 +27,11 @@ export function entryPart(entry: LoggedEntry, { settings, memory }: Pick<Here, '
     }
     case 'reading':
       return { ...part('entry-reading', { vessel }), list: measuredParts(entry, mark) };
-    case 'vessel':
-      return {
-        ...part('entry-vessel', { vessel, ...eventValues(entry) }),
-        list: toldParts(entry, settings.volumeUnit, mark),
-      };
+    case 'vessel': {
+      const list = toldParts(entry, here.settings.volumeUnit, mark);
+      const values = { vessel, ...eventValues(entry, here), told: list.length === 0 ? 'none' : 'some' };
+      return { ...part('entry-vessel', values), list };
+    }
     case 'other':
       return part('entry-other', { vessel, text: entry.remark });
     case 'stock':
@@ -50,11 +52,15 @@ function measuredParts(entry: Extract<Entry, { kind: 'reading' }>, mark: Decimal
   ];
 }
 
-function eventValues({ event, to, lot, volume_L }: VesselChange): Record<string, string> {
+function eventValues(
+  { event, to, lot, volume_L, until }: VesselChange,
+  here: Pick<Here, 'settings' | 'message'>,
+): Record<string, string> {
   return {
     event,
     to: to === undefined ? 'none' : vesselName(to),
     lot: lot ?? '',
+    until: until === undefined ? '' : dayText(until, tellingOf(here)),
     whole: volume_L === undefined ? 'all' : 'part',
   };
 }

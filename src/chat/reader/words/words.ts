@@ -61,7 +61,7 @@ export type OwnWordId =
   | 'check' | 'every' | 'often'
   | 'is' | 'has' | 'now' | 'who' | 'done-to' | 'racked' | 'moved' | 'pumped' | 'over' | 'topped' | 'blended'
   | 'emptied' | 'empty' | 'acidified' | 'went-in' | 'acid' | 'some' | 'holds' | 'capacity' | 'tank' | 'in-it' | 'there-is' | 'in' | 'wine' | 'and' | 'left'
-  | 'to' | 'from' | 'with' | 'of' | 'off-lees' | 'finished' | 'ml-way' | 'lot' | 'number' | 'remark' | 'remark-bare' | 'bottled'
+  | 'to' | 'from' | 'with' | 'of' | 'off-lees' | 'finished' | 'two-meanings' | 'ml-way' | 'lot' | 'number' | 'remark' | 'remark-bare' | 'bottled'
   | 'sampled' | 'at' | 'on' | 'until' | 'moment-bar' | 'this-morning' | 'last-night' | 'part-of-day' | 'ago' | 'am'
   | 'pm' | 'oclock' | 'noon' | 'hour' | 'minute' | 'day' | 'week' | 'ordinal'
   | 'count-half' | 'count-1' | 'count-2' | 'count-3' | 'count-4' | 'count-5' | 'count-6'; // prettier-ignore

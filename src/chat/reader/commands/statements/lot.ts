@@ -35,9 +35,13 @@ function isLot(board: Board, from: number, to: number, isWorded: boolean): boole
   if (terms.some(({ kind, text }) => kind === 'mark' && !/^[-/_.#&']$/.test(text))) return false;
   const numbers = terms.flatMap(({ kind }, k) => (kind === 'number' ? [from + k] : []));
   if (isWorded) {
-    const first = board.folded.capital[termAt(board, from).start] === true;
+    const isCapital = (i: number): boolean => board.folded.capital[termAt(board, i).start] === true;
+    const words = terms.flatMap(({ kind }, k) => (kind === 'word' ? [from + k] : []));
+    // `T4 lot 2026 arrived today` is a sentence; names have capitals, or one word.
+    if (words.length > 1 && !words.every((i) => isCapital(i) || !termAt(board, i).gap)) return false;
+    const isSingle = terms.length === 1;
     return (
-      (numbers.length > 0 || first) && (terms.length === 1 || numbers.every((i) => isNumberOfName(board, i)))
+      (numbers.length > 0 || isCapital(from)) && (isSingle || numbers.every((i) => isNumberOfName(board, i)))
     );
   }
   const isCode = terms.length > 1 && numbers.some((i) => termAt(board, i).gap === false);
@@ -71,6 +75,12 @@ export function readLot(board: Board): Draft | undefined {
   let to = own.terms.length - 1;
   while (to >= 0 && (termAt(own, to).kind === 'break' || /^[.!,]$/.test(termAt(own, to).text))) to--;
   if (!name || !isLot(own, name.from, to, name.isWorded)) return undefined;
+  // `T4 = T5`: another tank is no lot.
+  const isVessel = own.findings.some(
+    ({ field, value, from }) =>
+      field === 'vessel' && from === name.from && /^(tank|barrel) /.test(String(value)),
+  );
+  if (isVessel) return undefined;
   const lot = wordsOf(own, name.from, to);
   const isToCome = own.pieces.some(({ ids }) => ids.includes('tomorrow') || ids.includes('next-week'));
   if (lot.length > MOST_LETTERS || isToCome) return undefined;

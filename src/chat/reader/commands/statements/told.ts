@@ -6,15 +6,24 @@ import { findsOnly, tells, tellsOnly } from './tale.ts';
 
 const KIND = ['style', 'category', 'product', 'organic', 'stage'] as const;
 
-/** `T4 finished`: a word for the end of the fermentations that stands alone. */
+/** `T4 finished`: the word behind the vessel and alone; `we finished T4` tells of work. */
 function endsFermentations({ board, items }: Tale): boolean {
-  const item = items.find(({ finding, piece }) => finding === undefined && piece.ids.includes('finished'));
+  const at = items.findIndex(({ finding, piece }) => finding === undefined && piece.ids.includes('finished'));
+  const item = items[at];
+  const isBehind = at > items.findIndex(({ finding }) => finding !== undefined);
+  const isByNobody = items.every(({ piece }) => !piece.ids.includes('who'));
   const isSaid = board.findings.every(({ field }) => field === 'vessel' || field === 'vessels');
-  if (item === undefined || !isSaid) return false;
+  if (item === undefined || !isBehind || !isByNobody || !isSaid) return false;
   const { from, to } = item.piece;
   board.findings.push({ field: 'stage', value: 'finished', said: 'labelled', from, to });
   return true;
 }
+
+/** `T4 bubbles`, `T4 port`: a word that may tell of the tank and not of its wine, unless it is said to be it. */
+const isUnclear = (tale: Tale): boolean =>
+  !tells(tale, 'is') &&
+  tale.items.filter(({ finding }) => finding !== undefined).length === 2 &&
+  tale.items.some(({ finding, piece }) => finding !== undefined && piece.ids.includes('two-meanings'));
 
 /** `T4 5200 L` asks for a dose; what is, or is left, or is now in it is told. */
 function isStated({ items }: Tale): boolean {
@@ -39,7 +48,7 @@ export function readTold(tale: Tale): Command | undefined {
   const { board } = tale;
   if (!findsOnly(tale, 'vessel', 'vessels', 'volume_L', ...KIND)) return undefined;
   const isVolume = findingOf(board, 'volume_L') !== undefined;
-  if (isVolume && !isStated(tale)) return undefined;
+  if ((isVolume && !isStated(tale)) || isUnclear(tale)) return undefined;
   const isKind = KIND.some((field) => findingOf(board, field) !== undefined);
   const aside = varietiesAside(tale);
   const allowed = ['is', 'has', 'there-is', 'in-it', 'in', 'wine', 'and', 'still', 'again', 'ml-way', 'finished'] as const; // prettier-ignore
