@@ -23,7 +23,12 @@ function endsFermentations({ board, items }: Tale): boolean {
 const isUnclear = (tale: Tale): boolean =>
   !tells(tale, 'is') &&
   tale.items.filter(({ finding }) => finding !== undefined).length === 2 &&
-  tale.items.some(({ finding, piece }) => finding !== undefined && piece.ids.includes('two-meanings'));
+  tale.items.some(
+    ({ finding, piece }) =>
+      finding !== undefined &&
+      piece.ids.includes('two-meanings') &&
+      termAt(tale.board, piece.from).text === piece.text,
+  );
 
 /** `T4 5200 L` asks for a dose; what is, or is left, or is now in it is told. */
 function isStated({ items }: Tale): boolean {
