@@ -15,7 +15,9 @@ export interface Errands {
   /** The bytes of a file by the name that somebody wrote; undefined where there is none, or where none may be read. */
   readonly readFile: (name: string) => Promise<Uint8Array | undefined>;
   /** Where a backup goes; absent where none is made from this chat. */
-  readonly backupPath?: (now: number) => string;
+  readonly backupPath?: (now: number) => Promise<string>;
+  /** Puts a file where the person finds it and gives the path; absent where the chat itself carries files. */
+  readonly handOver?: (file: ExportFile) => Promise<string>;
   readonly report: (fault: unknown) => void;
 }
 
@@ -53,7 +55,7 @@ function runErrand(errand: Errand, message: IncomingMessage, errands: Errands): 
 async function runExport(
   errand: Extract<Errand, { kind: 'export' }>,
   message: IncomingMessage,
-  { store, say }: Errands,
+  { store, say, handOver }: Errands,
 ): Promise<Brought> {
   const { from, to, vessel, format, zone, decimalMark, language } = errand;
   // From the beginning on: what was known of a wine then follows from all that came before.
@@ -72,10 +74,10 @@ async function runExport(
     ...(vessel !== undefined && { vessel }),
   };
   const { makeExport } = await import('./files/make-export.ts');
-  return {
-    said: [],
-    file: await makeExport({ entries, people, span, format, zone, decimalMark, language }, say),
-  };
+  const request = { entries, people, span, format, zone, decimalMark, language };
+  const file = await makeExport(request, say);
+  if (handOver === undefined) return { said: [], file };
+  return { said: [saying('export-written', { path: await handOver(file) }, message, say)] };
 }
 
 async function runImport(
@@ -93,7 +95,7 @@ async function runImport(
 }
 
 async function runBackup(message: IncomingMessage, { store, backupPath, say }: Errands): Promise<Brought> {
-  const path = backupPath?.(message.at);
+  const path = await backupPath?.(message.at);
   if (path === undefined) return { said: [saying('backup-elsewhere', {}, message, say)] };
   await store.backup(path);
   return { said: [saying('backup-written', { path }, message, say)] };

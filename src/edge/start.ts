@@ -1,28 +1,17 @@
-import type { CellarStore } from '../core/cellar/cellar-store.ts';
 import { handle } from '../chat/conversation/conversation.ts';
-import { DEFAULT_SETTINGS, type Settings } from '../chat/conversation/settings.ts';
+import { DEFAULT_SETTINGS } from '../chat/conversation/settings.ts';
 import { makeSay } from '../chat/replies/say.ts';
 import { makeAudit } from './audit-workings.ts';
 import { systemClock as clock } from './clock.ts';
-import { readConfig, type Config } from './config.ts';
-import { loadEnvironment, type Environment } from './environment.ts';
+import { readConfig } from './config.ts';
+import type { Ground } from './ground.ts';
+import { loadEnvironment } from './environment.ts';
 import { loadLocales } from './locales.ts';
-import { machineZone } from './machine-zone.ts';
-import { createOperator, type Operator } from './operator.ts';
+import { createOperator } from './operator.ts';
 import { makeServe } from './serve-message.ts';
-import { shownName } from './shown-name.ts';
 import { stopSignal } from './stop-signal.ts';
 
 const STDOUT = 1;
-
-/** What both chats stand on. */
-interface Ground {
-  readonly config: Config;
-  readonly environment: Environment;
-  readonly operator: Operator;
-  readonly store: CellarStore;
-  readonly signal: AbortSignal;
-}
 
 /** Joins the parts and serves: on Telegram where a token is set, else in the terminal. Resolves at a clean stop. */
 export async function start(): Promise<void> {
@@ -42,34 +31,12 @@ export async function start(): Promise<void> {
   try {
     const ground = { config, environment, operator, store, signal: stopSignal() };
     // Each chat is loaded only when it is the one that serves.
-    await (config.botToken === undefined ? startTerminal(ground) : startTelegram(ground, config.botToken));
+    if (config.botToken !== undefined) return await startTelegram(ground, config.botToken);
+    const { startTerminal } = await import('./terminal/start-terminal.ts');
+    await startTerminal(ground);
   } finally {
     await store.close();
   }
-}
-
-async function startTerminal({ environment, operator, store, signal }: Ground): Promise<void> {
-  const { runTerminal } = await import('./terminal/chat.ts');
-  const { stdin: input, stdout: output } = process;
-  const interactive = input.isTTY && output.isTTY;
-  const { USER, USERNAME, LOGNAME } = environment;
-  const name = shownName(USER ?? USERNAME ?? LOGNAME);
-  const zone = machineZone();
-  const settings: Settings = { ...DEFAULT_SETTINGS, ...(zone !== undefined && { zone }) };
-  const say = makeSay(loadLocales());
-  await runTerminal({
-    serve: makeServe({ handle, say, store, settings, report: operator.report }),
-    say,
-    input,
-    output,
-    now: clock.now,
-    language: 'en',
-    interactive,
-    signal,
-    ...(name !== undefined && { name }),
-    // A pipe ends with its answer, and waits for nothing more.
-    ...(interactive && { audit: makeAudit(operator.tell) }),
-  });
 }
 
 async function startTelegram({ config, operator, store, signal }: Ground, botToken: string): Promise<void> {

@@ -1,4 +1,4 @@
-import type { IncomingMessage, Who } from '../../chat/conversation/ports.ts';
+import type { Errand, IncomingMessage, Who } from '../../chat/conversation/ports.ts';
 import type { Language } from '../../chat/reader/understood.ts';
 import type { Said, Say } from '../../chat/replies/say.ts';
 import type { Audit } from '../audit-workings.ts';
@@ -16,6 +16,8 @@ export interface TerminalOptions {
   readonly language: Language;
   /** The name of whoever sits there. */
   readonly name?: string;
+  /** Does what has to do with files, after the answer; gives what to say. */
+  readonly runErrand?: (errand: Errand, message: IncomingMessage) => Promise<readonly Said[]>;
   /** Checks the workings, after their answers. */
   readonly audit?: Audit;
   /** Whether a person sits there: then there is a greeting and a prompt. */
@@ -61,13 +63,24 @@ export async function runTerminal(options: TerminalOptions): Promise<void> {
 }
 
 async function answer(text: string, id: string, options: TerminalOptions): Promise<readonly Said[]> {
-  const { serve, now, language, name, audit } = options;
+  const { serve, now, language, name, audit, runErrand } = options;
   const content = { kind: 'text', text } as const;
   const who = { ...AT_TERMINAL, ...(name !== undefined && { name }) };
   const message: IncomingMessage = { ...who, id, at: now(), language, content };
-  const { said, answers } = await serve(message);
+  const { said, answers, errand } = await serve(message);
   audit?.(answers);
-  return said;
+  if (errand === undefined || runErrand === undefined) return said;
+  return [...said, ...(await runErrand(errand, message))];
+}
+
+/** What is said unasked stands on lines of its own. */
+export function showUnasked(
+  said: readonly Said[],
+  output: NodeJS.WritableStream,
+  interactive: boolean,
+): void {
+  for (const one of said) output.write(`${interactive ? '\n' : ''}${asShown(one)}\n\n`);
+  if (interactive && said.length > 0) output.write(PROMPT);
 }
 
 /** The text, and under it the buttons that a number presses; choices with letters stand in the text already. */

@@ -1,0 +1,76 @@
+import { handle } from '../../chat/conversation/conversation.ts';
+import { DEFAULT_SETTINGS, type Settings } from '../../chat/conversation/settings.ts';
+import { makeSay } from '../../chat/replies/say.ts';
+import { makeAudit } from '../audit-workings.ts';
+import { systemClock as clock } from '../clock.ts';
+import type { Ground } from '../ground.ts';
+import { loadLocales } from '../locales.ts';
+import { machineZone } from '../machine-zone.ts';
+import { runReminders } from '../reminders/run-reminders.ts';
+import { createWakeUp } from '../reminders/wake-up.ts';
+import { wakingTurn } from '../reminders/waking-turn.ts';
+import { makeRunErrand } from '../run-errand.ts';
+import { makeServe } from '../serve-message.ts';
+import { makeServeDue } from '../serve-due.ts';
+import { shownName } from '../shown-name.ts';
+import { AT_TERMINAL, runTerminal, showUnasked } from './chat.ts';
+import { backupPathOf, readNamedFile, writeExport } from './errand-files.ts';
+
+/** Serves the chat on the keyboard, and says there what falls due, until the input ends or the program is stopped. */
+export async function startTerminal({ config, environment, operator, store, signal }: Ground): Promise<void> {
+  const { stdin: input, stdout: output } = process;
+  const interactive = input.isTTY && output.isTTY;
+  const { USER, USERNAME, LOGNAME } = environment;
+  const name = shownName(USER ?? USERNAME ?? LOGNAME);
+  const zone = machineZone();
+  const settings: Settings = { ...DEFAULT_SETTINGS, ...(zone !== undefined && { zone }) };
+  const say = makeSay(loadLocales());
+  const { tell, report } = operator;
+  const { dataFile } = config;
+
+  const wakeUp = createWakeUp();
+  const turn = wakingTurn(store, wakeUp);
+  const serve = makeServe({ handle, say, store: { turn }, settings, report });
+  const serveDue = makeServeDue({ say, store: { turn }, settings });
+  const runErrand = makeRunErrand({
+    store,
+    say,
+    serve,
+    settings,
+    readFile: readNamedFile,
+    backupPath: (now) => backupPathOf(dataFile, now),
+    handOver: (file) => writeExport(dataFile, file),
+    report,
+  });
+
+  const ended = new AbortController();
+  const reminders = runReminders({
+    store,
+    clock,
+    wakeUp,
+    signal: ended.signal,
+    log: { error: ({ err }: { err: unknown }) => report(err), warn: () => undefined },
+    say: async (due) => {
+      // What is for another chat waits until that chat is served again.
+      if (due.chat !== AT_TERMINAL.chat) return;
+      const { said } = await serveDue(due, clock.now());
+      showUnasked(said, output, interactive);
+    },
+  });
+  await runTerminal({
+    serve,
+    runErrand: async (errand, message) => (await runErrand(errand, message)).said,
+    say,
+    input,
+    output,
+    now: clock.now,
+    language: 'en',
+    interactive,
+    signal,
+    ...(name !== undefined && { name }),
+    // A pipe ends with its answer, and waits for nothing more.
+    ...(interactive && { audit: makeAudit(tell) }),
+  });
+  ended.abort();
+  await reminders;
+}
