@@ -12,6 +12,9 @@ COPY --from=packages /app/node_modules ./node_modules
 COPY package.json ./
 COPY src ./src
 COPY locales ./locales
+# The cellar's file: outside the image, so that it outlives the container.
+RUN mkdir data && chown node:node data
+VOLUME /app/data
 USER node
 # Without npm in between: it would not hand on the signal that asks for a clean stop.
 CMD ["node", "src/main.ts"]
