@@ -486,6 +486,12 @@ unreadable =
        *[other] I only read text. Please type the figures.
     }
 fault = That failed on my side, and nothing was worked out. Please send it once more; if it fails again, tell whoever runs me.
+fault-aside = That failed on my side three times, so I have put it aside: nothing of it was worked out or noted. Whoever runs me can see why.
+left-unread =
+    { $count ->
+        [one] I was away. A message here is older than 12 hours, and I have not read it: nothing of it is noted. Send it again if it still counts.
+       *[other] I was away. { $count } messages here are older than 12 hours, and I have not read them: nothing of them is noted. Send again what still counts.
+    }
 old-button = That button is from an older message. Please send the reading again.
 
 ## An emergency

@@ -11,3 +11,8 @@ import { line } from './lines/line.ts';
 export function faultReply(language: Language, isUnwritten = false): Reply {
   return { language, lines: [line('first', isUnwritten ? 'fault-unwritten' : 'fault')], buttons: [] };
 }
+
+/** What a person gets when their message failed again and again and is put aside, so that what comes after it goes on. */
+export function asideReply(language: Language): Reply {
+  return { language, lines: [line('first', 'fault-aside')], buttons: [] };
+}

@@ -257,6 +257,7 @@ export interface SentenceValues {
   'fact-volume': 'volume';
   'fact-volume-count': 'count' | 'volume';
   fault: never;
+  'fault-aside': never;
   'fault-unwritten': never;
   'ferment-stop': 'adds';
   'ferment-stop-more': never;
@@ -283,6 +284,7 @@ export interface SentenceValues {
   landed: 'added' | 'after' | 'percent' | 'planned' | 'unit' | 'vessel';
   'landed-fell': 'added' | 'after' | 'before' | 'unit' | 'vessel';
   'landed-too-high': 'added' | 'rise' | 'unit' | 'vessel';
+  'left-unread': 'count';
   'list-more': 'count';
   'list-separator': never;
   measure: 'vessel';
