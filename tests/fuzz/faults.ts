@@ -15,7 +15,8 @@ export function faults(turn: Turn): string[] {
   const answers = handled.answers ?? [];
   return [
     ...(JSON.stringify(again) === JSON.stringify(handled) ? [] : ['handled twice, it comes out differently']),
-    ...(handled.replies.length === 0 ? ['no reply'] : []),
+    // An errand is answered by whoever runs it.
+    ...(handled.replies.length === 0 && handled.errand === undefined ? ['no reply'] : []),
     ...(readings.length === answers.length ? [] : [`${readings.length} readings, ${answers.length} answers`]),
     ...handled.replies.flatMap((reply) => wrongText(turn, reply)),
     ...readings.flatMap((reading, at) => {
