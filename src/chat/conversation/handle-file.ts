@@ -26,13 +26,16 @@ export async function handleFile(read: ImportRead, here: Here, view: CellarView)
   const until = here.message.at + SHOWN_ms;
   return {
     ...said,
-    writes: [{ kind: 'keep', key: importKey(ref), text: JSON.stringify(read), until }, ...writes],
+    writes: [
+      { kind: 'keep', key: importKey(here.message.chat, ref), text: JSON.stringify(read), until },
+      ...writes,
+    ],
   };
 }
 
 /** "Take it": all that was shown is noted, or nothing. */
 export async function takeImport(ref: string, here: Here, view: CellarView): Promise<Handled> {
-  const text = await view.kept(importKey(ref));
+  const text = await view.kept(importKey(here.message.chat, ref));
   if (text === undefined) return replying(here, { lines: [line('first', 'old-button')] });
   const { entries, people, problems } = await fitted(JSON.parse(text) as ImportRead, here, view);
   if (problems.length > 0) return replying(here, { lines: importProblemLines(problems) });
@@ -48,7 +51,7 @@ export async function takeImport(ref: string, here: Here, view: CellarView): Pro
         return { kind: 'person', id, number, ...(name !== undefined && { name }) };
       }),
       ...entries.map((entry): Write => ({ kind: 'entry', entry })),
-      { kind: 'drop', key: importKey(ref) },
+      { kind: 'drop', key: importKey(here.message.chat, ref) },
       ...writes,
     ],
   };

@@ -11,9 +11,14 @@ export function memoryKey({ chat, person }: Pick<Who, 'chat' | 'person'>): strin
   return `memory ${JSON.stringify([chat, person])}`;
 }
 
-/** A reading that buttons refer to. */
-export function readingKey(ref: string): string {
-  return `reading ${ref}`;
+/** A reading that buttons refer to, by the chat they stand in: a person’s readings are counted in each anew. */
+export function readingKey(chat: string, ref: string): string {
+  return `reading ${JSON.stringify([chat, ref])}`;
+}
+
+/** What a button under a reading notes, so that it is noted once however often it is pressed. */
+export function buttonKey(does: 'dose' | 'note' | 'order' | 'sampled', chat: string, ref: string): string {
+  return `${does} ${JSON.stringify([chat, ref])}`;
 }
 
 /** Who is about to dose a vessel. */
@@ -22,8 +27,8 @@ export function claimKey(vessel: string): string {
 }
 
 /** A file that was shown and may be taken. */
-export function importKey(ref: string): string {
-  return `import ${ref}`;
+export function importKey(chat: string, ref: string): string {
+  return `import ${JSON.stringify([chat, ref])}`;
 }
 
 /** The last dose that was reckoned for a vessel. */

@@ -69,7 +69,7 @@ export function remembering({ message }: Here, said: readonly Said[], chosen = f
       at: message.at,
       ...(chosen && { chosen }),
     };
-    return { kind: 'keep', key: readingKey(ref), text: JSON.stringify(remembered), until };
+    return { kind: 'keep', key: readingKey(message.chat, ref), text: JSON.stringify(remembered), until };
   });
 }
 

@@ -10,8 +10,9 @@ export interface Claim {
 
 /** A dose that was reckoned for a vessel: what to weigh, and where it should lead. */
 export interface Plan extends AdditiveNoted, AmountNoted {
-  /** What the reading is remembered under. */
+  /** What the reading is remembered under, and in which chat. */
   readonly ref: string;
+  readonly chat: string;
   readonly at: number;
   readonly planned_mg_L: number;
   readonly planned_free_mg_L?: number;

@@ -34,7 +34,7 @@ export async function handlePress(key: string, here: Here, view: CellarView): Pr
   if (ofEntry) return pressEntry(ofEntry, here, view);
   const button = parseKey(key);
   if (button?.does === 'i') return takeImport(button.ref, here, view);
-  const kept = button && (await view.kept(readingKey(button.ref)));
+  const kept = button && (await view.kept(readingKey(message.chat, button.ref)));
   const found = kept === undefined ? undefined : (JSON.parse(kept) as Remembered);
   // A button is for those who see it.
   if (!button || found?.chat !== message.chat) return saying(settings, [line('first', 'old-button')]);

@@ -36,12 +36,15 @@ function factsOf(vessel: Vessel, oldest_pH: number): Facts {
 }
 
 /** The additive where none is named: of an addition what was planned, else what is used for this vessel. */
-function additiveFor({ intent, fields, marks }: Reading, name: string, here: Here): Facts {
-  if (fields.additive !== undefined || marks.unnamedAdditive || marks.campden) return {};
+function additiveFor(
+  { intent, fields, marks }: Reading,
+  name: string,
+  here: Here,
+): { readonly value: AdditiveNoted; readonly at: number } | undefined {
+  if (fields.additive !== undefined || marks.unnamedAdditive || marks.campden) return undefined;
   const plan = intent === 'added' ? here.plans.get(name) : undefined;
-  if (plan && isMeasuredAlike(plan, fields)) return additiveFacts(plan, plan.at);
-  const usual = here.vessels.get(name)?.usual;
-  return usual ? additiveFacts(usual.value, usual.at) : {};
+  if (plan && isMeasuredAlike(plan, fields)) return { value: plan, at: plan.at };
+  return here.vessels.get(name)?.usual;
 }
 
 /** Grams were planned and grams went in; a solution is planned and told in millilitres, Campden tablets by their number. */
@@ -52,7 +55,7 @@ function isMeasuredAlike(plan: Plan, fields: Fields): boolean {
   );
 }
 
-function additiveFacts(noted: AdditiveNoted, at: number): Facts {
+function additiveFacts({ value: noted, at }: { readonly value: AdditiveNoted; readonly at: number }): Facts {
   const names = ['additive', 'strength_percent', 'tablet_SO2_g', 'tablet_salt_g'] as const;
   return Object.fromEntries(
     names.flatMap((name) => (noted[name] === undefined ? [] : [[name, { value: noted[name], at }]])),
@@ -84,7 +87,8 @@ export function recall(reading: Reading, here: Here): Reading {
   if (fields.vessel === undefined || names === undefined || problems.length > 0) return reading;
   const vessel = here.vessels.get(fields.vessel);
   const facts = vessel ? factsOf(vessel, here.message.at - here.settings.ph_days * DAY_ms) : {};
-  const wanted = { ...additiveFor(reading, fields.vessel, here), ...only(facts, names) };
+  const additive = additiveFor(reading, fields.vessel, here);
+  const wanted = { ...(additive && additiveFacts(additive)), ...only(facts, names) };
   const isAddition = fields.target !== undefined && 'add_mg_L' in fields.target;
   const isAsked = marks.volumeChoices ?? marks.fruitByWeight ?? marks.eachOrTotal;
   const fresh = Object.entries(wanted).filter(
@@ -95,10 +99,13 @@ export function recall(reading: Reading, here: Here): Reading {
   );
   if (fresh.length === 0) return reading;
   const { assumed: _assumed, asks: _asks, ...draft } = reading;
+  const isSalt = additive?.value.strength_of === 'salt' && fields.strength_percent === undefined;
   return finishReading(
     {
       ...draft,
       fields: { ...fields, ...Object.fromEntries(fresh.map(([name, known]) => [name, known.value])) },
+      // A strength of the salt is no strength of SO2: it goes with the figure.
+      ...(isSalt && { strength_of: 'salt' as const }),
       recalled: { ...reading.recalled, ...Object.fromEntries(fresh.map(([name, { at }]) => [name, at])) },
     },
     here.settings,

@@ -68,7 +68,7 @@ function addedAsPlanned({ intent, fields, asks, problems }: Reading, here: Here)
   if (Object.keys(others).some((name) => name !== 'additive')) return undefined;
   if (vessel === undefined) return here.memory.lastButtons.find((key) => parseKey(key)?.does === 'a');
   const plan = here.plans.get(vessel);
-  return plan && `a:${plan.ref}`;
+  return plan?.chat === here.message.chat ? `a:${plan.ref}` : undefined;
 }
 
 async function answerChosen(

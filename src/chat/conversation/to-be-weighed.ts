@@ -12,7 +12,10 @@ import { additiveOf } from './to-requests.ts';
  * rounding of the instrument, and its own mg/L. Undefined where the dose has no one amount: a choice, or tablets with
  * the rest as a stock.
  */
-export function toBeWeighed(reading: Reading, answer: DoseAnswer): Omit<Plan, 'ref' | 'at'> | undefined {
+export function toBeWeighed(
+  reading: Reading,
+  answer: DoseAnswer,
+): Omit<Plan, 'ref' | 'chat' | 'at'> | undefined {
   const additive = additiveOf(reading);
   const each = answer.per_vessel;
   const { measure, stock } = each ?? answer;

@@ -34,11 +34,13 @@ function pick<K extends keyof Fields>(fields: Fields, keys: readonly K[]): Pick<
 export function additiveOf(reading: Reading): AdditiveAtHand | undefined {
   const id = reading.fields.additive ?? reading.assumed.additive;
   if (id === undefined || reading.asks.some((field) => SETTLES_ADDITIVE.includes(field))) return undefined;
-  const { strength_percent: usual } = reading.assumed;
+  const { strength_percent: usual, strength_of } = reading.assumed;
+  const isUsual = usual !== undefined && reading.fields.strength_percent === undefined;
   return {
     id,
     ...(usual !== undefined && { strength_percent: usual }),
     ...pick(reading.fields, ['strength_percent', 'tablet_SO2_g', 'tablet_salt_g']),
+    ...(isUsual && strength_of && { strength_of }),
     ...(reading.strength_of && { strength_of: reading.strength_of }),
   };
 }

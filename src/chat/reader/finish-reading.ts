@@ -21,9 +21,7 @@ function usualTarget({ style, category }: Fields, { targets }: ReaderSettings): 
 
 /** The additive that is taken where none is named, with its strength where it is not pure. */
 function usualAdditive({ usualAdditive: additive, usualStrength }: ReaderSettings): Assumed {
-  return usualStrength === undefined
-    ? { additive }
-    : { additive, strength_percent: usualStrength.strength_percent };
+  return { additive, ...usualStrength };
 }
 
 /** What is missing of the additive: its name, its strength, the size of its tablet. */

@@ -48,6 +48,8 @@ export interface Assumed {
   readonly additive?: AdditiveId;
   /** The strength of the usual additive, where it is not pure. */
   readonly strength_percent?: number;
+  /** That strength is of the salt and not of SO2. */
+  readonly strength_of?: 'salt';
   readonly target?: Target;
   readonly stage?: Stage;
   readonly volume_L?: number;

@@ -53,7 +53,7 @@ function planOf(reading: Reading, { answer }: Outcome, { here, ref }: Turn): Out
   const { vessel } = reading.fields;
   const weighed = answer === null ? undefined : toBeWeighed(reading, answer as DoseAnswer);
   if (vessel === undefined || weighed === undefined) return [];
-  const { at } = here.message;
-  const plan: Plan = { ...weighed, ref, at };
+  const { at, chat } = here.message;
+  const plan: Plan = { ...weighed, ref, chat, at };
   return [{ kind: 'keep', key: planKey(vessel), text: JSON.stringify(plan), until: at + PLAN_ms }];
 }

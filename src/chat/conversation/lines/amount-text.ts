@@ -6,8 +6,23 @@ import { massText } from '../../replies/quantity-text.ts';
 import type { Line } from '../../replies/reply.ts';
 import { part } from './line.ts';
 
-/** A volume of additive in millilitres, from a litre up in litres. */
+/** What somebody states has few digits, and none of them is rounded away. */
+const isStated = (value: number): boolean => Math.abs(value * 100 - Math.round(value * 100)) < 1e-7;
+
+/** A mass in grams as it was stated, from a kilogram up in kilograms where that loses nothing. */
+function statedMassText(mass_g: number, mark: DecimalMark): string {
+  if (!isStated(mass_g)) return massText(mass_g, mark);
+  if (mass_g >= 1000 && Number.isInteger(mass_g / 10)) return massText(mass_g, mark);
+  return `${numberText(mass_g, 2, mark)} g`;
+}
+
+/** A volume of additive in millilitres, from a litre up in litres where that loses nothing of what was stated. */
 export function additiveVolumeText(additive_volume_mL: number, mark: DecimalMark): string {
+  if (
+    isStated(additive_volume_mL) &&
+    !(additive_volume_mL >= 1000 && Number.isInteger(additive_volume_mL / 10))
+  )
+    return `${numberText(additive_volume_mL, 2, mark)} mL`;
   if (additive_volume_mL >= 1000) return `${numberText(additive_volume_mL / 1000, 2, mark)} L`;
   return `${numberText(additive_volume_mL, additive_volume_mL >= 9.95 ? 0 : 1, mark)} mL`;
 }
@@ -31,7 +46,7 @@ export function statedAmount(
   if (mass_g === undefined) return undefined;
   // The mass of effervescent tablets is told as the SO2 they give.
   const key = ADDITIVES[id].kind === 'tablet' ? 'amount-SO2' : 'amount';
-  return part(key, { amount: massText(mass_g, mark), additive: id });
+  return part(key, { amount: statedMassText(mass_g, mark), additive: id });
 }
 
 /** How many effervescent tablets give so many grams of SO2, where it is a whole number of them or of halves. */

@@ -9,7 +9,7 @@ import type { Manner } from '../manner.ts';
 import { countOf } from '../to-requests.ts';
 import { partsOf, strengthKind } from './facts.ts';
 import { listLine, part } from './line.ts';
-import { noteParts } from './notes.ts';
+import { noteParts, saltFactor } from './notes.ts';
 import { targetValues } from './target-text.ts';
 
 type Part = Omit<Line, 'room'>;
@@ -63,6 +63,8 @@ function filledIn(reading: Reading, manner: Manner, weighs: boolean): Part[] {
             kind: strengthKind(additive, strength),
           }),
     );
+  if (weighs && additive !== undefined && assumed.strength_of)
+    parts.push(part('note-strength-as-salt', { factor: saltFactor(additive, manner) }));
   if (assumed.target) parts.push(part(targetKey(fields), targetValues(assumed.target, manner)));
   if (assumed.gallon) parts.push(part('assumed-gallon', { gallon: assumed.gallon }));
   if (assumed.volume_L !== undefined)

@@ -1,3 +1,4 @@
+import type { AdditiveId } from '../../../core/additives/additive-id.ts';
 import { ADDITIVES } from '../../../core/additives/additives.ts';
 import type { ReadNote, Reading } from '../../reader/understood.ts';
 import { numberText } from '../../replies/number-text.ts';
@@ -18,8 +19,7 @@ const AMONG_THE_ASSUMED = [
 ] as const satisfies readonly ReadNote['id'][];
 
 /** How many times as much SO2 the strength would be, were it of SO2 and not of the salt. */
-function saltFactor(reading: Reading, { mark }: Manner): string {
-  const { additive } = reading.fields;
+export function saltFactor(additive: AdditiveId | undefined, { mark }: Manner): string {
   return additive === undefined ? '1' : numberText(1 / ADDITIVES[additive].SO2_share, 2, mark);
 }
 
@@ -31,7 +31,10 @@ export function noteParts(reading: Reading, manner: Manner): Omit<Line, 'room'>[
   return told
     .flatMap((id) => reading.notes.flatMap((note) => (note.id === id ? [{ id, text: note.text }] : [])))
     .map(({ id, text }) =>
-      part(`note-${id}`, id === 'strength-as-salt' ? { factor: saltFactor(reading, manner) } : { text }),
+      part(
+        `note-${id}`,
+        id === 'strength-as-salt' ? { factor: saltFactor(reading.fields.additive, manner) } : { text },
+      ),
     );
 }
 

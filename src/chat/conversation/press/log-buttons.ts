@@ -9,7 +9,7 @@ import { additionOf } from '../addition-of.ts';
 import type { Here } from '../here.ts';
 import { notedAddition, type AdditionNote } from '../intents/noted-addition.ts';
 import { notedOrder } from '../intents/noted-order.ts';
-import { claimKey } from '../keys.ts';
+import { buttonKey, claimKey } from '../keys.ts';
 import { line } from '../lines/line.ts';
 import { mannerOf } from '../manner.ts';
 import type { Remembered } from '../memory.ts';
@@ -29,7 +29,12 @@ import { whenOf } from '../when.ts';
 export async function noteDose(found: Remembered, here: Here, view: CellarView): Promise<Handled> {
   const addition = doseAsAddition(found, here);
   if (addition === undefined) return replying(here, { lines: [line('first', 'old-button')] });
-  return noteOnce({ happening: addition, at: here.message.at }, `dose ${found.ref}`, here, view);
+  return noteOnce(
+    { happening: addition, at: here.message.at },
+    buttonKey('dose', found.chat, found.ref),
+    here,
+    view,
+  );
 }
 
 /** "Note it" under an addition whose amount was worked out. */
@@ -38,7 +43,7 @@ export async function noteWorkedOut(found: Remembered, here: Here, view: CellarV
   const happening = additionOf(reading, added(toAddedRequest(reading)), here);
   // When it was told, not when the button was pressed.
   const { at } = whenOf(reading, { ...here, message: { ...here.message, at: found.at } });
-  return noteOnce({ happening, at }, `note ${found.ref}`, here, view);
+  return noteOnce({ happening, at }, buttonKey('note', found.chat, found.ref), here, view);
 }
 
 /** Notes what a button stands for, unless it was noted and still holds. */
@@ -130,7 +135,7 @@ export function claimDose({ reading }: Remembered, here: Here): Handled {
 export async function orderDose(found: Remembered, here: Here, view: CellarView): Promise<Handled> {
   const addition = doseAsAddition(found, here);
   if (addition === undefined) return replying(here, { lines: [line('first', 'old-button')] });
-  const key = `order ${found.ref}`;
+  const key = buttonKey('order', found.chat, found.ref);
   const before = await view.entryOfKey(key);
   if (before) return alreadyNoted(before, here);
   const { kind: _kind, planned_mg_L: _mg, planned_free_mg_L: _free, order: _order, ...amount } = addition;

@@ -2,6 +2,7 @@ import type { CellarView } from '../../../core/cellar/cellar-store.ts';
 import type { Reading } from '../../reader/understood.ts';
 import { answerSingle } from '../answer-single.ts';
 import type { Here } from '../here.ts';
+import { buttonKey } from '../keys.ts';
 import type { Remembered } from '../memory.ts';
 import { noting, type Note } from '../note.ts';
 import { lastAdditionAt } from '../notes-of-reading.ts';
@@ -35,7 +36,7 @@ export async function answerSampled(
 
 /** The reading that was noted with the message, taken back, and noted at the time it is of. */
 async function notedEarlier(
-  { ref }: Remembered,
+  { ref, chat }: Remembered,
   reading: Reading,
   here: Here,
   view: CellarView,
@@ -61,6 +62,6 @@ async function notedEarlier(
       at,
       key: `strike ${corrects}`,
     },
-    { happening, at: whenOf(reading, here, last).at, key: `sampled ${ref}` },
+    { happening, at: whenOf(reading, here, last).at, key: buttonKey('sampled', chat, ref) },
   ];
 }
