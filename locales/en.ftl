@@ -798,6 +798,8 @@ noted-vessel =
 amount-unknown = some SO2
 fact-capacity = holds { $volume }
 fact-lot = { $lot }
+fact-chemical-lot = lot { $lot }
+fact-remark = “{ $remark }”
 event-said =
     { $event ->
         [racked] { " " }racked

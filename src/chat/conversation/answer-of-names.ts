@@ -7,6 +7,7 @@ import { setBoard } from '../reader/read-message.ts';
 import { splitTerms } from '../reader/split-terms.ts';
 import type { AskedField, Draft, FieldName, Reading, ReaderSettings } from '../reader/understood.ts';
 import type { Waiting } from './memory.ts';
+import { isOfSolution } from './waiting.ts';
 
 /** More words than this are no answer but talk; own threshold. */
 const MOST_TERMS = 7;
@@ -49,7 +50,7 @@ export function answerOfNames(
   const { additive, strength_percent } = draft.fields;
   const stock = additive === undefined ? undefined : STOCK_OF[additive];
   // Who said "solution" before names its salt now.
-  if (stock === undefined || strength_percent !== undefined || !reading.marks.unnamedSolution) return draft;
+  if (stock === undefined || strength_percent !== undefined || !isOfSolution(reading)) return draft;
   return { ...draft, fields: { ...draft.fields, additive: stock } };
 }
 

@@ -44,9 +44,13 @@ export function choicesFor(field: AskedField, reading: Reading, settings: Settin
     ? 'sodium-metabisulfite-solution'
     : 'potassium-metabisulfite-solution';
   // Who said "solution" means no powder.
-  const usual =
-    reading.marks.unnamedSolution && isPowder(settings.usualAdditive) ? [] : [settings.usualAdditive];
+  const usual = isOfSolution(reading) && isPowder(settings.usualAdditive) ? [] : [settings.usualAdditive];
   return [...new Set([...usual, stock, ...SOLUTIONS_AT_HAND])].map((additive) => ({ additive }));
+}
+
+/** Whether a solution is spoken of whose name is missing: so it was called, or it was measured in millilitres. */
+export function isOfSolution({ marks, fields }: Reading): boolean {
+  return marks.unnamedSolution === true || fields.additive_volume_mL !== undefined;
 }
 
 function isPowder(additive: AdditiveId): boolean {

@@ -63,7 +63,11 @@ function work(
   const base: Assumed = { ...(volume_L === undefined ? {} : { volume_L }), ...gallon };
   const unknownVolume = fields.volume_L === undefined && volume_L === undefined;
   const nameless = fields.additive === undefined && !marks.unnamedAdditive && !marks.campden;
-  const additive: Assumed = nameless ? usualAdditive(settings) : {};
+  // Millilitres are of no powder: which solution it was has to be asked.
+  const unnamedLiquid =
+    nameless && fields.additive_volume_mL !== undefined && !settings.usualAdditive.endsWith('-solution');
+  const additive: Assumed = nameless && !unnamedLiquid ? usualAdditive(settings) : {};
+  if (unnamedLiquid) asks.add('additive');
   const vesselless = fields.vessel === undefined && fields.vessels === undefined;
   if (intent === 'dose') {
     const stage = fields.stage ?? 'finished';

@@ -239,12 +239,14 @@ export interface SentenceValues {
   'fact-allowance': 'percent';
   'fact-capacity': 'volume';
   'fact-category': 'category';
+  'fact-chemical-lot': 'lot';
   'fact-figure': 'figure';
   'fact-free': 'free';
   'fact-lot': 'lot';
   'fact-organic': never;
   'fact-ph': 'ph';
   'fact-product': 'product';
+  'fact-remark': 'remark';
   'fact-share': 'percent';
   'fact-stage': 'stage';
   'fact-strength': 'additive' | 'kind' | 'strength';

@@ -6,7 +6,7 @@ import { vesselNames } from '../../replies/vessel-name.ts';
 import { entryButtons } from '../buttons.ts';
 import { claimKey, ZONE_ASKED_KEY } from '../keys.ts';
 import { line } from '../lines/line.ts';
-import { notedAmount } from '../lines/noted-amount.ts';
+import { besideAmount, notedAmount } from '../lines/noted-amount.ts';
 import { oddLines } from '../lines/odd.ts';
 import { numberOf } from '../lines/amount-text.ts';
 import { perLitre } from '../manner.ts';
@@ -51,7 +51,7 @@ function notedLine({ happening, at }: AdditionNote, { here, manner }: Pick<Turn,
     order: order === undefined ? 'none' : String(order),
   };
   if (amount === undefined) return line('first', 'noted-bare', values);
-  return { ...line('first', 'noted-addition', values), list: [amount] };
+  return { ...line('first', 'noted-addition', values), list: [amount, ...besideAmount(happening)] };
 }
 
 /** When to measure; the day may lie behind, where the addition is noted late. */

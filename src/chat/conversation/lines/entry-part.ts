@@ -8,7 +8,7 @@ import { volumeText } from '../../replies/volume-text.ts';
 import type { Here } from '../here.ts';
 import { tellingOf } from '../telling.ts';
 import { part } from './line.ts';
-import { notedAmount } from './noted-amount.ts';
+import { besideAmount, notedAmount } from './noted-amount.ts';
 
 type Part = Omit<Line, 'room'>;
 
@@ -23,7 +23,10 @@ export function entryPart(entry: LoggedEntry, here: Pick<Here, 'settings' | 'mem
       const { added_mg_L } = entry;
       const added = added_mg_L === undefined ? 'none' : concentrationText(added_mg_L, mark);
       const values = { vessel, added, known: amount ? 'some' : 'none' };
-      return { ...part(`entry-${entry.kind}`, values), list: amount ? [amount] : [] };
+      return {
+        ...part(`entry-${entry.kind}`, values),
+        list: [...(amount ? [amount] : []), ...besideAmount(entry)],
+      };
     }
     case 'reading':
       return { ...part('entry-reading', { vessel }), list: measuredParts(entry, mark) };
