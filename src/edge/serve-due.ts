@@ -1,4 +1,4 @@
-import type { CellarStore, TakenDue } from '../core/cellar/cellar-store.ts';
+import type { CellarStore, TakenDue, Write } from '../core/cellar/cellar-store.ts';
 import { handleDue } from '../chat/conversation/handle-due.ts';
 import type { Settings } from '../chat/conversation/settings.ts';
 import type { Said, Say } from '../chat/replies/say.ts';
@@ -16,18 +16,25 @@ export interface Unasked {
   readonly said: readonly Said[];
 }
 
-/** Makes the serving of due things: what is to be sent, once what it wrote is durable. Rejects where the store fails. */
-export function makeServeDue({
-  say,
-  store,
-  settings,
-}: ServingDue): (due: TakenDue, now: number) => Promise<Unasked> {
-  return (due, now) =>
+/**
+ * Serves a due thing: what is to be sent, once what it wrote is durable. `also` gives what the turn writes besides.
+ * Rejects where the store fails.
+ */
+export type ServeDue = (
+  due: TakenDue,
+  now: number,
+  also?: (unasked: Unasked) => readonly Write[],
+) => Promise<Unasked>;
+
+/** Makes the serving of due things. */
+export function makeServeDue({ say, store, settings }: ServingDue): ServeDue {
+  return (due, now, also) =>
     store.turn(due.cellar, async (view) => {
       const { chat, cellar } = due;
       // Its hour may have been changed since it was handed out.
       if ((await view.due(due.id)) === undefined) return { writes: [], result: { chat, said: [] } };
       const { writes, replies } = await handleDue({ cellar, due, at: now }, view, settings);
-      return { writes, result: { chat, said: replies.map(say) } };
+      const result: Unasked = { chat, said: replies.map(say) };
+      return { writes: also === undefined ? writes : [...writes, ...also(result)], result };
     });
 }

@@ -128,7 +128,7 @@ describe('the program', { timeout: 30_000 }, () => {
 
   test('finishes what is in hand after SIGTERM, and ends with status 0', async () => {
     await using api = await FakeBotApi.start();
-    const rosa = new Person(api, 7001);
+    const rosa = new Person(api, 7001, { begun_s: Math.floor(Date.now() / 1000) });
     api.fail('sendMessage', { error_code: 500, description: 'Internal Server Error' });
     const run = start({ BOT_TOKEN: TOKEN, BOT_API_ROOT: api.root });
     rosa.sends('T4 1450 gal pH 3.58 free 21');

@@ -1,49 +1,119 @@
+import type { CellarStore, Write } from '../../core/cellar/cellar-store.ts';
+import type { Post } from '../../core/cellar/mailbox.ts';
+import { asideReply, faultReply } from '../../chat/conversation/fault-reply.ts';
+import { leftReply } from '../../chat/conversation/left-reply.ts';
+import type { Reply } from '../../chat/replies/reply.ts';
+import type { Say } from '../../chat/replies/say.ts';
 import type { Audit } from '../audit-workings.ts';
 import type { Clock } from '../clock.ts';
 import type { Log } from '../logging.ts';
-import type { Serve } from '../serve-message.ts';
-import { failureOf } from './failure.ts';
-import { clientSignal, type Platform } from './platform.ts';
-import { sendReplies } from './send-replies.ts';
+import type { ServeTurn } from '../serve-message.ts';
+import { StoreError } from '../store/store-error.ts';
+import { CHANNEL } from './channel.ts';
+import type { Handling } from './inbox.ts';
 import type { Arrival } from './to-message.ts';
-
-/** So long an answer waits for its tap to be acknowledged, in milliseconds. */
-const LONGEST_TAP_WAIT_MS = 1000;
+import { toPosts } from './to-posts.ts';
 
 /** What answering needs. */
 export interface AnswerOptions {
-  readonly serve: Serve;
-  /** Checks the workings once their replies are sent. */
+  readonly serve: ServeTurn;
+  readonly say: Say;
+  readonly store: Pick<CellarStore, 'turn'>;
+  /** Checks the workings once their replies are on their way. */
   readonly audit?: Audit;
-  readonly platform: Platform;
+  /** Takes what is to be sent, once it is durable. */
+  readonly send: (posts: readonly Post[]) => void;
+  /** Sends past the store, where that one fails. One try; never rejects. */
+  readonly sendNow: (posts: readonly Post[]) => Promise<void>;
+  /** Ends the waiting mark on a tapped button. Never rejects. */
+  readonly tellTapSeen: (tapId: string) => Promise<void>;
   readonly clock: Clock;
   readonly log: Log;
   /** Aborted when there is no time left. */
   readonly signal: AbortSignal;
 }
 
+/** Waits between the tries of an answer that fails, in milliseconds: three tries in all. */
+const TRY_WAITS_MS = [200, 1000] as const;
+/** Waits while the store fails, in milliseconds. */
+const STORE_WAITS_MS = [1000, 5000, 15_000, 60_000] as const;
+const LONGEST_STORE_WAIT_MS = 60_000;
+/** A cause is cut: it is for a look at it, and the log has the whole. */
+const LONGEST_CAUSE = 500;
+
 /**
- * Answers one arrival: it is served, and once what it wrote is durable the replies are sent. Never rejects: what fails
- * is logged. Gives back whether the arrival is done with; if not, the platform has to deliver it again.
+ * Makes the handling of what arrived: served in a turn that also writes the posts and that it is handled, so that
+ * nothing is answered twice and everything is answered.
  */
-export async function answerArrival(arrival: Arrival, options: AnswerOptions): Promise<boolean> {
-  const { serve, platform, clock, log, signal, audit } = options;
-  const { message, chatId, tapId } = arrival;
-  if (signal.aborted) return false;
-  const told = tapId === undefined ? undefined : tellTapSeen(tapId, options);
-  const { said, answers } = await serve(message);
-  // Before the answer, but an acknowledgement that is slow to come holds nothing up.
-  if (told !== undefined) await Promise.race([told, clock.wait(LONGEST_TAP_WAIT_MS)]);
-  const sent = await sendReplies(chatId, said, { api: platform.patient, log, signal });
-  audit?.(answers);
-  return sent === 'ended';
+export function makeHandling(options: AnswerOptions): Handling {
+  const { serve, say, store, audit, send, sendNow, tellTapSeen, clock, log, signal } = options;
+
+  const answer = async (arrival: Arrival): Promise<void> => {
+    if (arrival.tapId !== undefined) void tellTapSeen(arrival.tapId);
+    let failure: unknown;
+    for (const wait_ms of [0, ...TRY_WAITS_MS]) {
+      if (wait_ms > 0) await clock.wait(wait_ms, signal);
+      if (signal.aborted) return;
+      let posts: Post[] = [];
+      try {
+        const { answers } = await serve(arrival.message, ({ said }) => {
+          posts = toPosts(said, { ...arrival, to: arrival.message.id, now: clock.now() });
+          return [handled(arrival), ...posts.map(writePost)];
+        });
+        send(posts);
+        audit?.(answers);
+        return;
+      } catch (error) {
+        failure = error;
+      }
+    }
+    await putAside(arrival, failure);
+  };
+
+  const putAside = async (arrival: Arrival, cause: unknown): Promise<void> => {
+    log.error({ err: cause, update: arrival.updateId }, 'a message could not be answered');
+    const { language } = arrival.message;
+    const reply = cause instanceof StoreError ? faultReply(language, true) : asideReply(language);
+    await end([arrival], reply, String(cause).slice(0, LONGEST_CAUSE));
+  };
+
+  const leave: Handling['leave'] = async (arrivals) => {
+    log.warn({ left: arrivals.length }, 'messages of long ago are left unread');
+    await end(arrivals, leftReply(arrivals[0].message.language, arrivals.length));
+  };
+
+  /** Ends what is not answered as it should be, and says so. */
+  const end = async (
+    arrivals: readonly [Arrival, ...Arrival[]],
+    reply: Reply,
+    cause?: string,
+  ): Promise<void> => {
+    const [{ chatId, message }] = arrivals;
+    const posts = toPosts([say(reply)], { chatId, to: `${message.id} ended`, now: clock.now() });
+    const done = arrivals.map((arrival) => handled(arrival, cause));
+    for (let failures = 0; !signal.aborted; failures += 1) {
+      // What was sent past the store is not sent a second time.
+      const said = failures === 0 ? posts : [];
+      try {
+        const writes = [...done, ...said.map(writePost)];
+        await store.turn(message.cellar, async () => ({ writes, result: undefined }));
+        return send(said);
+      } catch (err) {
+        log.error({ err }, 'the store failed');
+        if (failures === 0) await sendNow(posts);
+        await clock.wait(STORE_WAITS_MS[failures] ?? LONGEST_STORE_WAIT_MS, signal);
+      }
+    }
+  };
+
+  return { answer, leave, putAside };
 }
 
-/** Ends the waiting mark on a tapped button. One try: the answer itself counts, and an old tap is refused anyway. */
-const tellTapSeen = async (tapId: string, { platform, log, signal }: AnswerOptions): Promise<void> => {
-  try {
-    await platform.once.answerCallbackQuery(tapId, {}, clientSignal(signal));
-  } catch (error) {
-    log.debug({ failure: failureOf(error) }, 'a tap could not be acknowledged');
-  }
-};
+const handled = ({ updateId }: Arrival, cause?: string): Write => ({
+  kind: 'handled',
+  channel: CHANNEL,
+  number: updateId,
+  ...(cause !== undefined && { cause }),
+});
+
+const writePost = (post: Post): Write => ({ kind: 'post', post });

@@ -1,23 +1,65 @@
-/** Runs tasks of one chat one after the other, and those of different chats side by side. */
-export interface ChatQueues {
-  /** Puts a task at the end of its chat's queue. The task must not reject. */
-  add(chatId: number, task: () => Promise<void>): void;
-  /** Resolves when no task is left. */
-  idle(): Promise<void>;
+/** What waits in a queue knows since when. */
+interface Queued {
+  readonly received_at: number;
 }
 
-/** Makes queues; a chat without tasks takes no memory. */
-export function createChatQueues(): ChatQueues {
-  const tails = new Map<number, Promise<void>>();
+/** Queues of chats: what waits in one is handled in order, and those of different chats side by side. */
+export interface ChatQueues<T> {
+  readonly add: (chatId: number, one: T) => void;
+  /** How many wait or are in hand, and since when the oldest does (milliseconds since 1970). */
+  readonly state: () => { readonly count: number; readonly oldest_at?: number };
+  /** Resolves when no more than so many wait or are in hand, or when the work has stopped. */
+  readonly atMost: (count: number) => Promise<void>;
+}
+
+/**
+ * Makes queues; a chat for which nothing waits takes no memory. `handle` is given all that waits in a chat and gives
+ * back how many of the first it has done; 0 stops the work in that chat. It must not reject.
+ */
+export function createChatQueues<T extends Queued>(
+  handle: (queue: readonly [T, ...T[]]) => Promise<number>,
+): ChatQueues<T> {
+  const queues = new Map<number, T[]>();
+  let count = 0;
+  let running = 0;
+  let watchers: (() => void)[] = [];
+  const look = (): void => {
+    for (const watcher of watchers.splice(0)) watcher();
+  };
+
+  const run = async (chatId: number, queue: T[]): Promise<void> => {
+    running += 1;
+    while (queue.length > 0) {
+      const done = await handle(queue as [T, ...T[]]);
+      if (done === 0) break;
+      queue.splice(0, done);
+      count -= done;
+      if (watchers.length > 0) look();
+    }
+    queues.delete(chatId);
+    running -= 1;
+    look();
+  };
+
   return {
-    add: (chatId, task) => {
-      const tail = (tails.get(chatId) ?? Promise.resolve()).then(task).then(() => {
-        if (tails.get(chatId) === tail) tails.delete(chatId);
-      });
-      tails.set(chatId, tail);
+    add: (chatId, one) => {
+      count += 1;
+      const queue = queues.get(chatId);
+      if (queue !== undefined) return void queue.push(one);
+      const made = [one];
+      queues.set(chatId, made);
+      void run(chatId, made);
     },
-    idle: async () => {
-      while (tails.size > 0) await Promise.all(tails.values());
+    state: () => {
+      const firsts = [...queues.values()].flatMap(([first]) => (first === undefined ? [] : [first]));
+      if (firsts.length === 0) return { count };
+      return { count, oldest_at: Math.min(...firsts.map(({ received_at }) => received_at)) };
+    },
+    atMost: async (most) => {
+      while (count > most && running > 0)
+        await new Promise<void>((resolve) => {
+          watchers = [...watchers, resolve];
+        });
     },
   };
 }

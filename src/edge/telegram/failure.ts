@@ -8,6 +8,8 @@ export type Failure =
       readonly code: number;
       readonly reason: string;
       readonly retryAfter_s?: number;
+      /** The name that a group has got since. */
+      readonly movedTo?: number;
     }
   /** The platform was not reached, or its answer did not arrive. */
   | { readonly kind: 'unreached'; readonly reason: string }
@@ -18,8 +20,14 @@ export type Failure =
 export function failureOf(error: unknown): Failure {
   if (error instanceof GrammyError) {
     const { error_code: code, description: reason, parameters } = error;
-    const { retry_after: retryAfter_s } = parameters;
-    return { kind: 'refused', code, reason, ...(retryAfter_s === undefined ? {} : { retryAfter_s }) };
+    const { retry_after: retryAfter_s, migrate_to_chat_id: movedTo } = parameters;
+    return {
+      kind: 'refused',
+      code,
+      reason,
+      ...(retryAfter_s !== undefined && { retryAfter_s }),
+      ...(movedTo !== undefined && { movedTo }),
+    };
   }
   if (error instanceof HttpError) return { kind: 'unreached', reason: reasonOf(error.error) };
   return { kind: 'fault', reason: reasonOf(error) };

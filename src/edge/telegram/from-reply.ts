@@ -1,9 +1,8 @@
 import type { Said } from '../../chat/replies/say.ts';
 import { splitText } from './split-text.ts';
 
-/** One call of `sendMessage`. */
+/** One call of `sendMessage`, without its chat. */
 export interface Sending {
-  readonly chat_id: number;
   readonly text: string;
   readonly link_preview_options: { is_disabled: true };
   readonly reply_markup?: { inline_keyboard: { text: string; callback_data: string }[][] };
@@ -16,15 +15,14 @@ export const LONGEST_KEY_BYTES = 64;
 const SHORT_LABEL = 20;
 
 /**
- * Makes the calls that send a reply to a chat: the text as it is, without a parse mode, so that nothing a person
+ * Makes the calls that send a reply: the text as it is, without a parse mode, so that nothing a person
  * wrote becomes markup; split at a line where it is too long, with the buttons under the last piece. A button
  * whose key the platform would refuse is left out, as it would take the whole message with it.
  */
-export function toSendings(chatId: number, reply: Said): Sending[] {
+export function toSendings(reply: Said): Sending[] {
   const pieces = splitText(reply.text);
   const rows = keyboardRows(reply.buttons);
   return pieces.map((text, index) => ({
-    chat_id: chatId,
     text,
     link_preview_options: { is_disabled: true },
     ...(rows.length > 0 && index === pieces.length - 1 ? { reply_markup: { inline_keyboard: rows } } : {}),

@@ -22,7 +22,7 @@ export async function greet(
 ): Promise<boolean> {
   while (!signal.aborted) {
     try {
-      const me = await platform.once.getMe(clientSignal(signal));
+      const me = await platform.calls.getMe(clientSignal(signal));
       backOff.succeeded();
       log.info({ bot: me.username }, 'serving Telegram');
       tell(`Serving Telegram as @${me.username}.`);

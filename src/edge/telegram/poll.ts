@@ -3,16 +3,14 @@ import type { Api } from 'grammy';
 import type { Clock } from '../clock.ts';
 import type { BackOff } from './back-off.ts';
 import { failureOf, isAboutWebhook } from './failure.ts';
-import type { Intake } from './intake.ts';
+import type { Inbox } from './inbox.ts';
 import { clientSignal } from './platform.ts';
-import { ALLOWED_UPDATES, readUpdates, type TelegramUpdate } from './update.ts';
+import { ALLOWED_UPDATES, readUpdates } from './update.ts';
 
 /** What polling needs. */
 export interface PollOptions {
   readonly api: Api;
-  readonly intake: Intake;
-  /** Takes an update that is kept. */
-  readonly accept: (update: TelegramUpdate) => void;
+  readonly inbox: Pick<Inbox, 'receive' | 'roomy'>;
   readonly backOff: BackOff;
   readonly clock: Clock;
   /** How long the platform holds a poll open when there is nothing, in seconds. */
@@ -23,21 +21,22 @@ export interface PollOptions {
 }
 
 /**
- * Reads updates until the signal is aborted: a batch is offered to the intake, and only when it is kept does the
- * next poll confirm it. Gives back the offset that is to be confirmed next.
+ * Reads updates until the signal is aborted: a batch is received into the inbox, and only when it is durable does
+ * the next poll confirm it. Gives back the offset that is to be confirmed next.
  *
  * @throws OperatorError when the token is no longer accepted.
  */
 export async function poll(options: PollOptions): Promise<number> {
-  const { api, intake, accept, backOff, signal } = options;
+  const { api, inbox, backOff, signal } = options;
+  const stopped = new Promise<void>((resolve) => signal.addEventListener('abort', () => resolve()));
   let offset = 0;
   while (!signal.aborted) {
     try {
       const updates = readUpdates(await askForUpdates(offset, options));
-      const fresh = await intake.offer(updates);
+      await inbox.receive(updates);
       for (const { update_id } of updates) offset = Math.max(offset, update_id + 1);
-      for (const update of fresh) accept(update);
       backOff.succeeded();
+      await Promise.race([inbox.roomy(), stopped]);
     } catch (error) {
       if (signal.aborted) break;
       // The operator asked for polling, so a webhook that stands in the way goes.

@@ -1,22 +1,34 @@
+import type { CellarStore } from '../../core/cellar/cellar-store.ts';
+import type { Say } from '../../chat/replies/say.ts';
 import type { Audit } from '../audit-workings.ts';
 import type { Clock } from '../clock.ts';
 import type { Log } from '../logging.ts';
-import type { Serve } from '../serve-message.ts';
-import { answerArrival } from './answer-arrival.ts';
+import type { WakeUp } from '../reminders/wake-up.ts';
+import type { ServeDue } from '../serve-due.ts';
+import type { ServeTurn } from '../serve-message.ts';
+import { makeHandling } from './answer-arrival.ts';
 import { createBackOff } from './back-off.ts';
-import { createChatQueues } from './chat-queues.ts';
+import { CHANNEL } from './channel.ts';
 import { confirmOffset } from './confirm-offset.ts';
 import { greet } from './greet.ts';
-import { createMemoryIntake, type Intake } from './intake.ts';
+import { createInbox } from './inbox.ts';
+import { createOutbox } from './outbox.ts';
+import { USUAL_LIMITS, type Limits } from './pace.ts';
 import { openPlatform } from './platform.ts';
 import { poll } from './poll.ts';
-import { toMessage } from './to-message.ts';
-import type { TelegramUpdate } from './update.ts';
+import { pruneNowAndThen } from './prune-now-and-then.ts';
+import { remind } from './remind.ts';
+import { sendPost } from './send-post.ts';
+import { makeTellTapSeen } from './tell-tap-seen.ts';
 
 /** Everything that serving Telegram needs, handed in. */
 export interface TelegramOptions {
-  readonly serve: Serve;
-  /** Checks the workings once their replies are sent. */
+  readonly serve: ServeTurn;
+  readonly say: Say;
+  readonly store: CellarStore;
+  /** Says what falls due; without it nothing is said unasked. */
+  readonly reminding?: { readonly serveDue: ServeDue; readonly wakeUp: WakeUp };
+  /** Checks the workings once their replies are on their way. */
   readonly audit?: Audit;
   readonly log: Log;
   readonly clock: Clock;
@@ -25,7 +37,7 @@ export interface TelegramOptions {
   readonly tell: (sentence: string) => void;
   /** Aborted when the program is asked to stop. */
   readonly signal: AbortSignal;
-  readonly intake?: Intake;
+  readonly limits?: Limits;
   readonly times?: Partial<Times>;
 }
 
@@ -33,6 +45,7 @@ export interface TelegramOptions {
 export interface Times {
   readonly longPoll_s: number;
   readonly callTimeout_s: number;
+  readonly sendTimeout_s: number;
   readonly watchdog_s: number;
   /** After the signal: for what is in hand, then for telling the platform. Together within 8 s. */
   readonly finish_s: number;
@@ -42,46 +55,56 @@ export interface Times {
 const USUAL_TIMES: Times = {
   longPoll_s: 30,
   callTimeout_s: 45,
+  sendTimeout_s: 20,
   watchdog_s: 60,
-  finish_s: 6.5,
+  finish_s: 6,
   confirm_s: 1.5,
 };
 
 /**
- * Serves private chats by long polling until the signal is aborted, then finishes what is in hand.
+ * Serves private chats by long polling until the signal is aborted, then finishes what is in hand; what there is no time
+ * for stays in the store.
  *
  * @throws OperatorError when the platform does not accept the token.
  */
 export async function serveTelegram(options: TelegramOptions): Promise<void> {
-  const { log, clock, config, tell, signal, intake = createMemoryIntake() } = options;
+  const { store, log, clock, config, tell, signal, limits = USUAL_LIMITS, reminding } = options;
   const times = { ...USUAL_TIMES, ...options.times };
   const { botToken: token, botApiRoot: root } = config;
-  const platform = openPlatform({ token, root, callTimeout_s: times.callTimeout_s, clock });
-  const queues = createChatQueues();
+  const platform = openPlatform({ token, root, ...times });
   const giveUp = new AbortController();
-  const answering = { ...options, platform, signal: giveUp.signal };
-  const finish = (updateId: number): Promise<void> =>
-    intake.done(updateId).catch((err: unknown) => log.error({ err, update: updateId }, 'the intake failed'));
-  const accept = (update: TelegramUpdate): void => {
-    const arrival = toMessage(update, clock.now());
-    const { update_id: id } = update;
-    // What is not answered still goes through a queue of its own, so that a stop waits for its end.
-    queues.add(arrival?.chatId ?? 0, async () => {
-      if (arrival === undefined || (await answerArrival(arrival, answering))) await finish(id);
-    });
-  };
+  const untilGivenUp = { clock, log, store, signal: giveUp.signal };
+  const sending = { api: platform.sends, signal: giveUp.signal };
+  const outbox = createOutbox({ ...untilGivenUp, limits, send: (post) => sendPost(post, sending) });
+  const handling = makeHandling({
+    ...options,
+    ...untilGivenUp,
+    send: outbox.add,
+    sendNow: async (posts) => {
+      for (const post of posts) await sendPost(post, sending);
+    },
+    tellTapSeen: makeTellTapSeen({ api: platform.calls, log, signal: giveUp.signal }),
+  });
+  const inbox = createInbox({ ...untilGivenUp, handling });
+  const background: Promise<void>[] = [];
   try {
     const backOff = createBackOff({ root, clock, log, tell, signal });
     if (!(await greet(platform, { backOff, log, tell, signal }))) return;
+    background.push(pruneNowAndThen({ store, clock, log, signal }));
+    outbox.add(await store.posts(CHANNEL));
+    await inbox.recover();
+    if (reminding !== undefined)
+      background.push(remind({ ...reminding, store, send: outbox.add, clock, log, signal }));
     const { longPoll_s, watchdog_s } = times;
-    const polling = { api: platform.once, intake, accept, backOff, clock, longPoll_s, watchdog_s, signal };
+    const polling = { api: platform.calls, inbox, backOff, clock, longPoll_s, watchdog_s, signal };
     const offset = await poll(polling);
-    await Promise.race([queues.idle(), clock.wait(1000 * times.finish_s, giveUp.signal)]);
+    const finished = Promise.all([inbox.idle(), ...background]).then(outbox.idle);
+    await Promise.race([finished, clock.wait(1000 * times.finish_s, giveUp.signal)]);
     giveUp.abort();
-    await queues.idle();
-    const left = await intake.unfinished();
-    if (left.length > 0) log.warn({ left: left.length }, 'there was no time left for some messages');
-    await confirmOffset(left[0] ?? offset, { api: platform.once, clock, log, within_s: times.confirm_s });
+    await Promise.all([inbox.idle(), outbox.idle()]);
+    const [left, unsent] = [inbox.state().count, outbox.state().count];
+    if (left + unsent > 0) log.warn({ left, unsent }, 'there was no time left for some messages');
+    await confirmOffset(offset, { api: platform.calls, clock, log, within_s: times.confirm_s });
   } finally {
     giveUp.abort();
     platform.close();

@@ -8,6 +8,8 @@ import { isServed, whoOf } from './who-of.ts';
 export interface Arrival {
   readonly updateId: number;
   readonly chatId: number;
+  /** Milliseconds since 1970. */
+  readonly received_at: number;
   readonly message: IncomingMessage;
   /** The tap that the platform waits to hear about; only with a press. */
   readonly tapId?: string;
@@ -45,7 +47,7 @@ const contentOf = (message: TelegramMessage): Content | undefined => {
 };
 
 const fromMessage = (
-  updateId: number,
+  { updateId, received_at }: Pick<Arrival, 'updateId' | 'received_at'>,
   message: TelegramMessage,
   options: { readonly edited: boolean },
 ): Arrival | undefined => {
@@ -60,6 +62,7 @@ const fromMessage = (
   const edit = options.edited ? ` edited ${message.edit_date ?? message.date}` : '';
   return {
     updateId,
+    received_at,
     chatId: chat.id,
     message: {
       ...whoOf(chat, from),
@@ -75,21 +78,22 @@ const fromMessage = (
 /**
  * Makes of an update the message that the conversation handles, or nothing where there is nothing to answer.
  *
- * @param now milliseconds since 1970: the time of a tap, for which the platform gives none.
+ * @param received_at milliseconds since 1970: also the time of a tap, for which the platform gives none.
  */
-export function toMessage(update: TelegramUpdate, now: number): Arrival | undefined {
+export function toMessage(update: TelegramUpdate, received_at: number): Arrival | undefined {
   const { update_id: updateId, message, edited_message: edited, callback_query: tap } = update;
-  if (message !== undefined) return fromMessage(updateId, message, { edited: false });
-  if (edited !== undefined) return fromMessage(updateId, edited, { edited: true });
+  if (message !== undefined) return fromMessage({ updateId, received_at }, message, { edited: false });
+  if (edited !== undefined) return fromMessage({ updateId, received_at }, edited, { edited: true });
   if (tap?.data === undefined || tap.message === undefined || !isServed(tap.message.chat)) return undefined;
   return {
     updateId,
+    received_at,
     chatId: tap.message.chat.id,
     tapId: tap.id,
     message: {
       ...whoOf(tap.message.chat, tap.from),
       id: `tap ${tap.id}`,
-      at: now,
+      at: received_at,
       language: languageOf(tap.from.language_code),
       content: { kind: 'press', key: tap.data },
     },

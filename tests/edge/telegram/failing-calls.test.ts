@@ -1,6 +1,5 @@
 import { describe, expect, test } from 'vitest';
 
-import { systemClock } from '../../../src/edge/clock.ts';
 import type { Fault } from './fake-bot-api.ts';
 import { CONFLICT, SERVER_ERROR, SLOW_DOWN } from './fault.ts';
 import { openScene } from './scene.ts';
@@ -23,9 +22,7 @@ describe('a call that fails', () => {
     await using scene = await openScene();
     const { api, rosa, serve } = scene;
     api.fail(method, ...faults);
-    // The hasty clock would come back to a method without a chat before its retry_after is over.
-    const clock = faults.includes(SLOW_DOWN) && method === 'getUpdates' ? { clock: systemClock } : {};
-    serve(clock);
+    serve();
     rosa.sends('first');
     await rosa.reads(copies);
     rosa.sends('second');
@@ -38,7 +35,7 @@ describe('a call that fails', () => {
     const { api, rosa, serve } = scene;
     api.fail('sendMessage', 'hang');
     api.fail('getUpdates', 'none', 'hang');
-    serve({ times: { callTimeout_s: 0.3, longPoll_s: 0.1 } });
+    serve({ times: { callTimeout_s: 0.3, sendTimeout_s: 0.3, longPoll_s: 0.1 } });
     rosa.sends('first');
     expect(await rosa.reads(1)).toBe('1: first');
     rosa.sends('second');

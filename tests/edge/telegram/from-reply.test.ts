@@ -12,20 +12,20 @@ const button = (label: string, key = `key of ${label}`): { key: string; mark: st
 });
 
 const rowsOf = (buttons: readonly ReturnType<typeof button>[]): string[][] =>
-  toSendings(1, { text: 'x', buttons }).flatMap((sending) =>
+  toSendings({ text: 'x', buttons }).flatMap((sending) =>
     (sending.reply_markup?.inline_keyboard ?? []).map((row) => row.map((one) => one.text)),
   );
 
 describe('a reply becomes a call', () => {
   test('with the text as it is and no parse mode, so that nothing in it is markup', () => {
     const text = 'T4 <b>_x_</b> [a](http://b.example) &amp;';
-    expect(toSendings(7001, { text, buttons: [] })).toEqual([
-      { chat_id: 7001, text, link_preview_options: { is_disabled: true } },
+    expect(toSendings({ text, buttons: [] })).toEqual([
+      { text, link_preview_options: { is_disabled: true } },
     ]);
   });
 
   test('with the key of a button as the data of it', () => {
-    const [sending] = toSendings(1, { text: 'x', buttons: [button('Working', 'w:3')] });
+    const [sending] = toSendings({ text: 'x', buttons: [button('Working', 'w:3')] });
     expect(sending?.reply_markup).toEqual({ inline_keyboard: [[{ text: 'Working', callback_data: 'w:3' }]] });
   });
 
@@ -48,13 +48,13 @@ describe('a reply becomes a call', () => {
 
   test('or several when it is long: cut between lines, the buttons under the last', () => {
     const line = `${'x'.repeat(99)}\n`;
-    const sendings = toSendings(1, { text: line.repeat(100), buttons: [button('Working')] });
+    const sendings = toSendings({ text: line.repeat(100), buttons: [button('Working')] });
     expect(sendings.map(({ text }) => text.length)).toEqual([4099 - 100, 4099 - 100, 1999 + 1]);
     expect(sendings.map(({ reply_markup }) => reply_markup !== undefined)).toEqual([false, false, true]);
   });
 
   test('or none when there is nothing to say', () => {
-    expect(toSendings(1, { text: ' \n', buttons: [button('Working')] })).toEqual([]);
+    expect(toSendings({ text: ' \n', buttons: [button('Working')] })).toEqual([]);
   });
 
   test('that is as the platform publishes it, whatever the text and the buttons are', () => {
@@ -67,8 +67,8 @@ describe('a reply becomes a call', () => {
     );
     fc.assert(
       fc.property(text, buttons, (said, marks) => {
-        const faults = toSendings(1, { text: said, buttons: marks }).flatMap((sending) =>
-          faultsOfCall('sendMessage', sending),
+        const faults = toSendings({ text: said, buttons: marks }).flatMap((sending) =>
+          faultsOfCall('sendMessage', { chat_id: 1, ...sending }),
         );
         expect(faults).toEqual([]);
       }),

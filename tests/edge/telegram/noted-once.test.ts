@@ -17,7 +17,10 @@ test('what was noted before a stop and comes again after it is noted once, under
   await api.until(() => api.callsOf('sendMessage').length > 0 && api.callsOf('getUpdates').length > 1);
   await early.stop();
   serve({ ...realConversation, store });
-  expect(await rosa.reads(1)).toMatch(/already noted/i);
+  expect(await rosa.reads(1)).toMatch(/noted/i);
+  rosa.sends('thanks');
+  await rosa.reads(2);
+  expect(rosa.texts.join('\n')).not.toMatch(/already/i);
   const [entries, people] = await store.look('telegram:7001', async (view) => [
     await view.entries({}),
     await view.people(),

@@ -44,8 +44,8 @@ describe('what goes wrong in one chat', () => {
     rosa.sends('throw');
     rosa.sends('last');
     await rosa.reads(3);
-    expect(rosa.texts).toEqual(['and more', 'fault', '2: last']);
-    expect(bot.logged.join('')).toContain('a reply could not be sent');
+    expect(rosa.texts).toEqual(['and more', 'fault-aside', '2: last']);
+    expect(bot.logged.join('')).toContain('a message could not be sent');
     expect(bot.logged.join('')).toContain('a message could not be answered');
   });
 

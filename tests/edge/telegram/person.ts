@@ -8,10 +8,17 @@ export class Person {
   readonly #api: FakeBotApi;
   readonly #from: object;
   readonly #chat: object;
+  readonly #begun_s: number;
   #messages = 0;
 
-  constructor(api: FakeBotApi, id: number, language_code = 'en') {
+  /** `begun_s`: when the first message is sent, in seconds since 1970; each further one is a second later. */
+  constructor(
+    api: FakeBotApi,
+    id: number,
+    { language_code = 'en', begun_s = 1_767_000_000 }: { language_code?: string; begun_s?: number } = {},
+  ) {
     this.#api = api;
+    this.#begun_s = begun_s;
     this.id = id;
     this.#from = { id, is_bot: false, first_name: 'Rosa <b>', language_code };
     this.#chat = { id, type: 'private', first_name: 'Rosa <b>' };
@@ -26,7 +33,7 @@ export class Person {
   /** Changes the last message. */
   edits(content: string | Extra): void {
     this.#api.offer({
-      edited_message: { ...this.#message(this.#messages, content), edit_date: 1_767_000_500 },
+      edited_message: { ...this.#message(this.#messages, content), edit_date: this.#begun_s + 500 },
     });
   }
 
@@ -59,6 +66,6 @@ export class Person {
 
   #message(message_id: number, content: string | Extra): object {
     const fields = typeof content === 'string' ? { text: content } : content;
-    return { message_id, date: 1_767_000_000 + message_id, chat: this.#chat, from: this.#from, ...fields };
+    return { message_id, date: this.#begun_s + message_id, chat: this.#chat, from: this.#from, ...fields };
   }
 }

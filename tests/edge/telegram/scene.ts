@@ -18,6 +18,7 @@ export interface Scene extends AsyncDisposable {
  */
 export async function openScene(): Promise<Scene> {
   const api = await FakeBotApi.start();
+  api.second_ms = 1;
   const bots: ServedBot[] = [];
   return {
     api,

@@ -1,5 +1,5 @@
 import { DEFAULT_SETTINGS } from '../../../src/chat/conversation/settings.ts';
-import { makeServe, type Serving } from '../../../src/edge/serve-message.ts';
+import { makeServeTurn, type Serving } from '../../../src/edge/serve-message.ts';
 import { createMemoryCellars } from '../../../src/edge/store/memory-cellars.ts';
 import { createLog } from '../../../src/edge/logging.ts';
 import { systemClock, type Clock } from '../../../src/edge/clock.ts';
@@ -7,9 +7,11 @@ import { serveTelegram, type TelegramOptions } from '../../../src/edge/telegram/
 import { TOKEN } from './fake-bot-api.ts';
 import * as stub from './stub-conversation.ts';
 
+const BEGUN_MS = performance.now();
+
 /** A clock on which a second passes in a millisecond. */
 export const hastyClock: Clock = {
-  now: () => 1_767_000_100_000,
+  now: () => 1_767_000_100_000 + 1000 * (performance.now() - BEGUN_MS),
   wait: (ms, signal) => systemClock.wait(ms / 1000, signal),
 };
 
@@ -40,9 +42,10 @@ export function serveBot(root: string, changes: BotChanges = {}): ServedBot {
     store = createMemoryCellars({ now: hastyClock.now }),
     ...others
   } = changes;
-  const report = (err: unknown): void => log.error({ err }, 'a message could not be answered');
   const ended = serveTelegram({
-    serve: makeServe({ handle, say, store, settings: DEFAULT_SETTINGS, report }),
+    serve: makeServeTurn({ handle, say, store, settings: DEFAULT_SETTINGS }),
+    say,
+    store,
     log,
     clock: hastyClock,
     config: { botToken: TOKEN, botApiRoot: root },
@@ -50,7 +53,14 @@ export function serveBot(root: string, changes: BotChanges = {}): ServedBot {
     signal: stopping.signal,
     ...others,
     // Long on the hasty clock, so that only the tests that want them see them end.
-    times: { callTimeout_s: 20, watchdog_s: 1e6, finish_s: 1e4, confirm_s: 1e4, ...changes.times },
+    times: {
+      callTimeout_s: 20,
+      sendTimeout_s: 20,
+      watchdog_s: 1e6,
+      finish_s: 1e4,
+      confirm_s: 1e4,
+      ...changes.times,
+    },
   });
   // A test that expects it to end badly looks at it later.
   ended.catch(() => undefined);

@@ -1,8 +1,10 @@
 import { describe, expect, test } from 'vitest';
 
+import { createMemoryCellars } from '../../../src/edge/store/memory-cellars.ts';
 import type { Fault } from './fake-bot-api.ts';
 import { SERVER_ERROR } from './fault.ts';
 import { openScene } from './scene.ts';
+import { hastyClock } from './served-bot.ts';
 import { handle } from './stub-conversation.ts';
 
 describe('a stop', () => {
@@ -51,23 +53,24 @@ describe('a stop', () => {
     await api.until(() => api.callsOf('sendMessage').length > 0);
     await bot.stop();
     expect(rosa.texts).toEqual([]);
-    expect(handled).toEqual(['message 1']);
-    expect(bot.logged.join('')).toContain('"left":2');
+    expect(handled).toEqual(['message 1', 'message 2']);
+    expect(bot.logged.join('')).toContain('"left":0,"unsent":2');
   });
 
-  test('leaves with the platform what it has not confirmed: the next one answers it', async () => {
+  test('leaves in the store what it has not sent: the next one sends it, though all of it was confirmed', async () => {
     await using scene = await openScene();
     const { api, rosa, serve } = scene;
     api.fail('sendMessage', 'hang');
-    api.fail('getUpdates', 'none', 'hang');
-    const early = serve({ times: { finish_s: 50 } });
+    const store = createMemoryCellars({ now: hastyClock.now });
+    const early = serve({ store, times: { finish_s: 50 } });
     rosa.sends('first');
     rosa.sends('second');
-    await api.until(() => api.callsOf('sendMessage').length > 0 && api.callsOf('getUpdates').length > 1);
+    await api.until(() => api.callsOf('sendMessage').length > 0 && api.confirmed === 1003);
     await early.stop();
-    serve();
-    await rosa.reads(2);
-    expect(rosa.texts).toEqual(['1: first', '2: second']);
+    serve({ store });
+    rosa.sends('third');
+    await rosa.reads(3);
+    expect(rosa.texts).toEqual(['1: first', '2: second', '3: third']);
   });
 
   test('does not wait for a platform that is away', async () => {

@@ -20,6 +20,7 @@ describe('an update becomes a message', () => {
   test('with all that the conversation has to know', () => {
     expect(arrive({ message: { ...MESSAGE, text: 'T4 1450 gal' } })).toEqual({
       updateId: 900,
+      received_at: NOW,
       chatId: 7001,
       message: {
         ...WHO,
@@ -35,6 +36,7 @@ describe('an update becomes a message', () => {
     const message = { message_id: 11, date: 0, chat: CHAT };
     expect(arrive({ callback_query: { id: 'tap-1', from: FROM, message, data: 'working:3' } })).toEqual({
       updateId: 900,
+      received_at: NOW,
       chatId: 7001,
       tapId: 'tap-1',
       message: {

@@ -1,0 +1,104 @@
+import type { Mailbox, Waiting } from '../../core/cellar/mailbox.ts';
+import type { Clock } from '../clock.ts';
+import { CHANNEL } from './channel.ts';
+import { createChatQueues } from './chat-queues.ts';
+import { toMessage, type Arrival } from './to-message.ts';
+import type { TelegramUpdate } from './update.ts';
+
+/** What receiving needs. */
+export interface InboxOptions {
+  readonly store: Pick<Mailbox, 'receive' | 'waiting' | 'countTry'>;
+  readonly handling: Handling;
+  readonly clock: Clock;
+  /** Aborted when there is no time left: what is not handled stays in the store. */
+  readonly signal: AbortSignal;
+}
+
+/** What becomes of what arrived. None of these rejects. */
+export interface Handling {
+  readonly answer: (arrival: Arrival) => Promise<void>;
+  /** Leaves unread what is too old, all of one chat. */
+  readonly leave: (arrivals: readonly [Arrival, ...Arrival[]]) => Promise<void>;
+  /** Puts aside what cannot be answered. */
+  readonly putAside: (arrival: Arrival, cause: unknown) => Promise<void>;
+}
+
+/** Keeps what arrives until it is handled: in order within a chat, side by side across chats. */
+export interface Inbox {
+  /** Resolves when it is durable; only then may the platform be told. Rejects where the store fails. */
+  readonly receive: (updates: readonly TelegramUpdate[]) => Promise<void>;
+  /** Takes up what an earlier process has left. */
+  readonly recover: () => Promise<void>;
+  /** Resolves when so little is in hand that more may come. */
+  readonly roomy: () => Promise<void>;
+  /** How many are in hand, and since when the oldest is (milliseconds since 1970). */
+  readonly state: () => { readonly count: number; readonly oldest_at?: number };
+  /** Resolves when nothing is in hand, or when there is no time left. */
+  readonly idle: () => Promise<void>;
+}
+
+/** Beyond so many in hand the rest stays with the platform. */
+const MOST_IN_HAND = 2000;
+/** What was in hand alone in so many processes that ended badly is what ended them. */
+const MOST_TRIES = 4;
+/** What was sent longer ago is answered no more: the wine is another by now. */
+const STALE_MS = 12 * 60 * 60 * 1000;
+
+/** Makes an inbox. */
+export function createInbox({ store, handling, clock, signal }: InboxOptions): Inbox {
+  const isStale = ({ message }: Arrival): boolean => message.at < clock.now() - STALE_MS;
+  const queues = createChatQueues<Arrival>(async (queue) => {
+    if (signal.aborted) return 0;
+    const [first] = queue;
+    const fresh = queue.findIndex((arrival) => !isStale(arrival));
+    const stale = fresh === -1 ? queue : queue.slice(0, fresh);
+    if (isStale(first)) await handling.leave(stale as [Arrival, ...Arrival[]]);
+    else await handling.answer(first);
+    return isStale(first) ? stale.length : 1;
+  });
+
+  /** What may have ended the process before is handled alone, so that it harms nothing else. */
+  const handleAlone = async (arrival: Arrival, { number, tries }: Waiting): Promise<void> => {
+    await store.countTry(CHANNEL, [number]);
+    if (isStale(arrival)) await handling.leave([arrival]);
+    else if (tries < MOST_TRIES) await handling.answer(arrival);
+    else await handling.putAside(arrival, new Error('the process ended while this was in hand'));
+  };
+
+  return {
+    receive: async (updates) => {
+      const received_at = clock.now();
+      const known = new Map<number, Arrival>();
+      const arrived = updates.flatMap((update) => {
+        const arrival = toMessage(update, received_at);
+        // What needs no answer needs no memory: should it come again, it needs none again.
+        if (arrival === undefined) return [];
+        known.set(update.update_id, arrival);
+        return [{ channel: CHANNEL, number: update.update_id, body: JSON.stringify(update), received_at }];
+      });
+      for (const { number } of await store.receive(arrived)) {
+        const arrival = known.get(number);
+        if (arrival !== undefined) queues.add(arrival.chatId, arrival);
+      }
+    },
+    recover: async () => {
+      const waiting = await store.waiting(CHANNEL);
+      const left = waiting.flatMap((one) => {
+        const arrival = toMessage(JSON.parse(one.body) as TelegramUpdate, one.received_at);
+        return arrival === undefined ? [] : [{ one, arrival }];
+      });
+      for (const { one, arrival } of left)
+        if (one.tries > 0 && !signal.aborted) await handleAlone(arrival, one);
+      const others = left.filter(({ one }) => one.tries === 0);
+      if (others.length === 0 || signal.aborted) return;
+      await store.countTry(
+        CHANNEL,
+        others.map(({ one }) => one.number),
+      );
+      for (const { arrival } of others) queues.add(arrival.chatId, arrival);
+    },
+    roomy: () => queues.atMost(MOST_IN_HAND),
+    state: queues.state,
+    idle: () => queues.atMost(0),
+  };
+}

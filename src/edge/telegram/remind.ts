@@ -1,0 +1,40 @@
+import type { CellarStore } from '../../core/cellar/cellar-store.ts';
+import type { Post } from '../../core/cellar/mailbox.ts';
+import type { Clock } from '../clock.ts';
+import type { Log } from '../logging.ts';
+import { runReminders } from '../reminders/run-reminders.ts';
+import type { WakeUp } from '../reminders/wake-up.ts';
+import type { ServeDue } from '../serve-due.ts';
+import { toPosts } from './to-posts.ts';
+import { chatIdOf } from './who-of.ts';
+
+/** What reminding on this platform needs. */
+export interface RemindOptions {
+  readonly serveDue: ServeDue;
+  readonly store: Pick<CellarStore, 'nextDue' | 'takeDue'>;
+  readonly wakeUp: WakeUp;
+  /** Takes what is to be sent, once it is durable. */
+  readonly send: (posts: readonly Post[]) => void;
+  readonly clock: Clock;
+  readonly log: Log;
+  readonly signal: AbortSignal;
+}
+
+/** Says what falls due: the turn that notes that it was said also writes what is to be sent. Never rejects. */
+export function remind({ serveDue, send, ...options }: RemindOptions): Promise<void> {
+  const { clock } = options;
+  return runReminders({
+    ...options,
+    say: async (due) => {
+      const chatId = chatIdOf(due.chat);
+      // A chat of another platform is for whoever serves that one.
+      if (chatId === undefined) return;
+      let posts: Post[] = [];
+      await serveDue(due, clock.now(), ({ said }) => {
+        posts = toPosts(said, { chatId, to: `due ${due.cellar} ${due.id} ${due.at}`, now: clock.now() });
+        return posts.map((post) => ({ kind: 'post', post }));
+      });
+      send(posts);
+    },
+  });
+}

@@ -1,0 +1,37 @@
+import { handle } from '../../chat/conversation/conversation.ts';
+import { DEFAULT_SETTINGS as settings } from '../../chat/conversation/settings.ts';
+import { makeSay } from '../../chat/replies/say.ts';
+import { makeAudit } from '../audit-workings.ts';
+import { systemClock as clock } from '../clock.ts';
+import type { Ground } from '../ground.ts';
+import { loadLocales } from '../locales.ts';
+import { createLog } from '../logging.ts';
+import { createWakeUp } from '../reminders/wake-up.ts';
+import { wakingTurn } from '../reminders/waking-turn.ts';
+import { makeServeDue } from '../serve-due.ts';
+import { makeServeTurn } from '../serve-message.ts';
+import { serveTelegram } from './serve-telegram.ts';
+
+const STDOUT = 1;
+
+/** Joins the parts and serves Telegram until a stop. */
+export async function startTelegram(ground: Ground, botToken: string): Promise<void> {
+  const { config, signal } = ground;
+  const { tell } = ground.operator;
+  const log = createLog({ level: config.logLevel, secret: botToken, to: STDOUT });
+  const say = makeSay(loadLocales());
+  const wakeUp = createWakeUp();
+  const store = { ...ground.store, turn: wakingTurn(ground.store, wakeUp) };
+  await serveTelegram({
+    serve: makeServeTurn({ handle, say, store, settings }),
+    say,
+    store,
+    reminding: { serveDue: makeServeDue({ say, store, settings }), wakeUp },
+    audit: makeAudit(tell),
+    config: { ...config, botToken },
+    log,
+    clock,
+    tell,
+    signal,
+  });
+}
