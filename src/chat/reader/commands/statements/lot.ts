@@ -76,10 +76,8 @@ export function readLot(board: Board): Draft | undefined {
   while (to >= 0 && (termAt(own, to).kind === 'break' || /^[.!,]$/.test(termAt(own, to).text))) to--;
   if (!name || !isLot(own, name.from, to, name.isWorded)) return undefined;
   // `T4 = T5`: another tank is no lot.
-  const isVessel = own.findings.some(
-    ({ field, value, from }) =>
-      field === 'vessel' && from === name.from && /^(tank|barrel) /.test(String(value)),
-  );
+  const other = own.findings.find(({ field, from }) => field === 'vessel' && from === name.from)?.value;
+  const isVessel = typeof other === 'string' && /^(tank|barrel) /.test(other);
   if (isVessel) return undefined;
   const lot = wordsOf(own, name.from, to);
   const isToCome = own.pieces.some(({ ids }) => ids.includes('tomorrow') || ids.includes('next-week'));
