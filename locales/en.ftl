@@ -928,7 +928,7 @@ vessel-check-due =
         [landing] { " " }(after the addition)
        *[other] { "" }
     }.
-vessel-unwatched = No checks. Again: watch it
+vessel-unwatched = No checks. Again: watch { $vessel }
 due-none = Nothing is due.
 due-head =
     { $number ->

@@ -1,6 +1,8 @@
 import type { CellarView, Person } from '../../core/cellar/cellar-store.ts';
 import type { Vessel } from '../../core/cellar/vessel.ts';
-import { claimKey, memoryKey, planKey, SETTINGS_KEY, ZONE_ASKED_KEY } from './keys.ts';
+import { claimKey, memoryKey, planKey, ROSTER_KEY, SETTINGS_KEY, ZONE_ASKED_KEY } from './keys.ts';
+import { roleOf } from './cellar/role-of.ts';
+import { readRoster, type Role, type Roster } from './cellar/roster.ts';
 import { FRESH_MEMORY, type Memory } from './memory.ts';
 import type { Claim, Plan } from './plan.ts';
 import type { IncomingMessage } from './ports.ts';
@@ -32,12 +34,17 @@ export interface Here extends CellarFacts {
   /** The number of the person who writes, and whether they are new in this cellar. */
   readonly me: number;
   readonly isNewPerson: boolean;
+  readonly roster: Roster;
+  /** What the person may do here; undefined where they may do nothing. */
+  readonly role: Role | undefined;
   /** The number that the next entry of the log gets. */
   readonly nextEntry: number;
   /** Whether the time zone was asked for before. */
   readonly isZoneAsked: boolean;
   /** The keys of what the same event has noted before: it is delivered again. */
   readonly done: ReadonlySet<string>;
+  /** What the event's entries are named by, where that is not the event itself. */
+  readonly event?: string;
 }
 
 /** What is known of the person and the cellar before the message is read. */
@@ -46,12 +53,16 @@ export async function arrive(message: IncomingMessage, view: CellarView, default
   const kept = await view.kept(memoryKey(message));
   const set = await view.kept(SETTINGS_KEY);
   const people = known === undefined ? await view.people() : [];
+  const me = known?.number ?? Math.max(0, ...people.map(({ number }) => number)) + 1;
+  const roster = readRoster(await view.kept(ROSTER_KEY));
   return {
     ...NO_FACTS,
     message,
     memory: kept === undefined ? FRESH_MEMORY : (JSON.parse(kept) as Memory),
     settings: { ...mergeSettings(defaults, set), language: message.language },
-    me: known?.number ?? Math.max(0, ...people.map(({ number }) => number)) + 1,
+    me,
+    roster,
+    role: roleOf(roster, me, message),
     isNewPerson: known === undefined || (message.name !== undefined && known.name !== message.name),
     nextEntry: await view.nextEntry(),
     isZoneAsked: (await view.kept(ZONE_ASKED_KEY)) !== undefined,

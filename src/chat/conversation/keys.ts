@@ -3,6 +3,19 @@ import type { Who } from './ports.ts';
 /** What the cellar has set. */
 export const SETTINGS_KEY = 'settings';
 
+/** Who may do what in the cellar, and what it is called. */
+export const ROSTER_KEY = 'roster';
+
+/** An invitation, by the part of its code that nobody can guess. */
+export function inviteKey(secret: string): string {
+  return `invite ${secret}`;
+}
+
+/** Whether a person who may not write here was told so today. */
+export function turnedAwayKey(person: string): string {
+  return `turned away ${person}`;
+}
+
 /** Whether the time zone was asked for once. */
 export const ZONE_ASKED_KEY = 'zone asked';
 

@@ -14,8 +14,7 @@ export interface Note {
 
 /** The writes that note things in the log, in their order; what the same event has noted before is not noted again. */
 export function noting(here: Here, notes: readonly Note[]): Write[] {
-  const { message, me, done } = here;
-  const event = eventKey(message);
+  const { message, me, done, event = eventKey(message) } = here;
   return notes.flatMap(({ happening, at, key = '' }, place): Write[] => {
     const own = key === '' ? `${event}${place}` : key;
     if (done.has(own)) return [];

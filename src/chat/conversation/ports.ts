@@ -19,6 +19,13 @@ export type Content =
   | { readonly kind: 'text'; readonly text: string }
   | { readonly kind: 'press'; readonly key: string }
   | { readonly kind: 'file'; readonly read: ImportRead }
+  /** An earlier message with another text: which one it was, and when that was sent (milliseconds since 1970). */
+  | {
+      readonly kind: 'edited';
+      readonly text: string;
+      readonly original: string;
+      readonly original_at: number;
+    }
   | {
       readonly kind: 'unreadable';
       readonly what: 'edited' | 'photo' | 'sticker' | 'voice' | 'file' | 'other';
@@ -33,6 +40,35 @@ export interface IncomingMessage extends Who {
   /** What the platform tells of the person's language. */
   readonly language: Language;
   readonly content: Content;
+  /** In a private chat, in a group to the bot (a mention, a reply, a command), or in a group among others; unsaid: direct. */
+  readonly addressed?: 'direct' | 'called' | 'overheard';
+  /** Whoever writes here has the machine itself: nothing is kept from them. */
+  readonly trusted?: true;
+  /** Letters and digits that nobody can guess, new with each message: a code is made of them. */
+  readonly nonce?: string;
+  /** What the platform calls the chat. */
+  readonly title?: string;
+  /** What a code is put behind to make a link of it. */
+  readonly linkBegin?: string;
+  /** The chat is in this cellar by an invitation: whether it still is, the cellar's own list of chats says. */
+  readonly isJoined?: true;
+  /** All cellars of the chat, where there are several; the present one is among them. */
+  readonly cellars?: readonly CellarPlace[];
+}
+
+/** A cellar that a chat may be in. */
+export interface CellarPlace {
+  readonly cellar: string;
+  /** What it is called; undefined where nobody has named it. */
+  readonly name?: string;
+  /** The name of its first keeper. */
+  readonly keeper?: string;
+}
+
+/** Another place for the chat of a message: its edge sees to it before what the message wrote is kept. */
+export interface PlaceChange {
+  readonly does: 'enter' | 'leave' | 'switch';
+  readonly cellar: string;
 }
 
 /** What core answers to one reading. */
@@ -53,7 +89,14 @@ export type Errand =
       readonly decimalMark: '.' | ',';
     }
   | { readonly kind: 'import'; readonly file: string; readonly language: Language }
-  | { readonly kind: 'backup'; readonly language: Language };
+  | { readonly kind: 'backup'; readonly language: Language }
+  | {
+      readonly kind: 'picture';
+      readonly vessel: string;
+      readonly zone: string;
+      readonly language: Language;
+      readonly decimalMark: '.' | ',';
+    };
 
 /** Handling a message returns its writes and its replies as data; the edge commits, then sends. */
 export interface Handled {
@@ -64,6 +107,9 @@ export interface Handled {
   /** One element a reading; `null` where nothing may be said. */
   readonly answers?: readonly (Answer | null)[];
   readonly errand?: Errand;
+  readonly place?: PlaceChange;
+  /** What is written has to be kept before the message can be read: it is to be handled once more then. */
+  readonly again?: true;
 }
 
 /** The conversation, as the edges have it: it looks at the cellar, and neither writes nor sends. */

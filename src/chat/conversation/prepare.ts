@@ -14,9 +14,12 @@ export function prepare(reading: Reading, here: Here): Reading {
  * The reading with the fields that the log has had by now, so that what follows on it notes only what is new, and with
  * the event that noted them.
  */
-export function asNoted(reading: Reading, { message }: Pick<Here, 'message'>): Reading {
+export function asNoted(
+  reading: Reading,
+  { message, event = eventKey(message) }: Pick<Here, 'message' | 'event'>,
+): Reading {
   const { noted = [] } = reading;
   const said = Object.keys(saidFields(reading)) as FieldName[];
   const fresh = said.filter((name) => LOGGED_FIELDS.includes(name) && !noted.includes(name));
-  return fresh.length === 0 ? reading : { ...reading, noted: [...noted, ...fresh], event: eventKey(message) };
+  return fresh.length === 0 ? reading : { ...reading, noted: [...noted, ...fresh], event };
 }

@@ -40,4 +40,6 @@ export interface Reply {
   readonly language: Language;
   readonly lines: readonly Line[];
   readonly buttons: readonly Button[];
+  /** The message whose reply this one takes the place of. */
+  readonly replaces?: string;
 }

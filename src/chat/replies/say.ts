@@ -8,6 +8,8 @@ import type { Line, Reply } from './reply.ts';
 export interface Said {
   readonly text: string;
   readonly buttons: readonly { readonly key: string; readonly mark: string; readonly label: string }[];
+  /** The message whose reply this one takes the place of. */
+  readonly replaces?: string;
 }
 
 /** Makes the text of a reply. */
@@ -74,6 +76,7 @@ export function makeSay(sources: LocaleSources): Say {
         mark: button.mark,
         label: labelOf(button),
       })),
+      ...(reply.replaces !== undefined && { replaces: reply.replaces }),
     };
   };
 }

@@ -485,7 +485,7 @@ export interface SentenceValues {
   'vessel-order': 'entry' | 'list' | 'when' | 'who';
   'vessel-readings': 'list';
   'vessel-unknown': 'vessel';
-  'vessel-unwatched': never;
+  'vessel-unwatched': 'vessel';
   'vessel-void': 'day' | 'event' | 'field';
   'vessels-head': 'count' | 'due' | 'number';
   'vessels-line': 'check' | 'day' | 'free' | 'lot' | 'next' | 'vessel';

@@ -85,7 +85,10 @@ function wholeDose(reading: Reading, request: DoseRequest, answer: DoseAnswer, t
       ...cautionLines(additive, inFull),
     ],
     buttons: doseButtons(ref, {
-      mayBeNoted: vesselsIn(reading.fields).length > 0 && toBeWeighed(reading, answer) !== undefined,
+      mayBeNoted:
+        here.role !== 'guest' &&
+        vesselsIn(reading.fields).length > 0 &&
+        toBeWeighed(reading, answer) !== undefined,
       stageAssumed: reading.assumed.stage !== undefined,
       mayBeRed: redFigures(answer) !== undefined,
       colourUnknown: isColourUnknown(reading),

@@ -140,7 +140,7 @@ function orderLines({ orders }: Vessel, here: Here): Line[] {
 
 function nextLines(vessel: Vessel, here: Here): Line[] {
   const check = nextCheck(vessel, checkSettingsOf(here.settings));
-  if (vessel.unwatched) return [line('first', 'vessel-unwatched')];
+  if (vessel.unwatched) return [line('first', 'vessel-unwatched', { vessel: vesselName(vessel.vessel) })];
   if (check === undefined) return [];
   const when = momentText(check.at, tellingOf(here));
   return [
