@@ -41,6 +41,16 @@ const PACKAGES: readonly { readonly name: RegExp; readonly in: RegExp; readonly 
     in: /^src\/edge\/files\//,
     why: 'bytes of tables are written and read in one room',
   },
+  {
+    name: /^d3-(scale|shape)$/,
+    in: /^src\/chat\/attachments\/chart\//,
+    why: 'pictures are drawn in one room',
+  },
+  {
+    name: /^@resvg\//,
+    in: /^src\/edge\/pictures\//,
+    why: 'pictures become bytes in one room',
+  },
   { name: /^zod$/, in: /^src\/(edge\/|main\.ts|ask\.ts)/, why: 'what comes in is checked at the rim' },
   { name: /^pino$/, in: /^src\/(edge\/|main\.ts|ask\.ts)/, why: 'core and chat say nothing to a log' },
 ];
