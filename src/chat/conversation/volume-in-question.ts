@@ -1,3 +1,4 @@
+import { STAGES_WITHOUT_TARGET } from '../../core/wine.ts';
 import { finishReading } from '../reader/finish-reading.ts';
 import type { Reading } from '../reader/understood.ts';
 import type { Here } from './here.ts';
@@ -16,6 +17,9 @@ export function volumeInQuestion(reading: Reading, here: Here): Reading | undefi
   const { fields, marks, recalled, problems, intent } = reading;
   const { vessel: name, volume_L } = fields;
   const vessel = name === undefined ? undefined : here.vessels.get(name);
+  // Where no dose is given, nothing hangs on it: the volume is taken as it was told.
+  const stage = fields.stage ?? vessel?.traits.stage?.value ?? 'finished';
+  if (fields.target === undefined && STAGES_WITHOUT_TARGET.includes(stage)) return undefined;
   if (vessel === undefined || volume_L === undefined || recalled?.volume_L !== undefined) return undefined;
   // What went in is a fact, whatever volume it is told with.
   if (intent !== 'dose' && intent !== 'effect') return undefined;
