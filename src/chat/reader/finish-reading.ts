@@ -10,11 +10,17 @@ const inOrder = (asks: ReadonlySet<AskedField>): AskedField[] =>
 const STRONG_percent = 17;
 
 /** Whether a wine has no usual target, so that it is asked: sparkling, fortified, 17 % vol and more. */
-export const hasNoUsualTarget = ({ category, alcohol_percent }: Fields): boolean =>
+export const hasNoUsualTarget = ({
+  category,
+  alcohol_percent,
+}: Pick<Fields, 'category' | 'alcohol_percent'>): boolean =>
   category === 'sparkling' || category === 'fortified' || (alcohol_percent ?? 0) >= STRONG_percent;
 
 /** The usual target of this kind of wine; sugar alone never makes it sweet. */
-function usualTarget({ style, category }: Fields, { targets }: ReaderSettings): Target {
+export function usualTarget(
+  { style, category }: Pick<Fields, 'style' | 'category'>,
+  { targets }: Pick<ReaderSettings, 'targets'>,
+): Extract<Target, { molecular_mg_L: number }> {
   if (category === 'sweet') return { molecular_mg_L: targets.sweet };
   return { molecular_mg_L: style === 'red' ? targets.red : targets.white };
 }
