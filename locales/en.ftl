@@ -649,6 +649,10 @@ choice-tablet_SO2_g = { $value } g
 folded = Working, other warnings: press More.
 terminal-start = brimnote reckons SO2 additions. Type a reading, like:
 terminal-start-example =     T4 1450 gal pH 3.58 free 21
+demo-start = This is a demo: the harbour cellar and its people are invented, and nothing you do is kept. Type:
+demo-start-sheets = The day sheet:  today        A history:  T4 history        What to measure next:  due
+demo-start-reading = Then a reading of your own, like:  T6 free 21
+demo-start-end = ? shows more, Ctrl-D ends.
 terminal-start-more = ? shows more, Ctrl-D ends. Several lines pasted together are one message.
 
 ## Buttons

@@ -4,4 +4,4 @@ import { enableCompileCache } from 'node:module';
 enableCompileCache();
 
 const { start } = await import('./edge/start.ts');
-await start();
+await start(process.argv.slice(2));

@@ -2,13 +2,22 @@ import { systemClock as clock } from './clock.ts';
 import { readConfig } from './config.ts';
 import { loadEnvironment } from './environment.ts';
 import { createOperator } from './operator.ts';
+import { readStartOptions } from './start-options.ts';
 import { stopSignal } from './stop-signal.ts';
 
-/** Joins the parts and serves: on Telegram where a token is set, else in the terminal. Resolves at a clean stop. */
-export async function start(): Promise<void> {
+/**
+ * Joins the parts and serves: on Telegram where a token is set, else in the terminal, and the demo there always.
+ * Resolves at a clean stop.
+ */
+export async function start(args: readonly string[]): Promise<void> {
   let operator = createOperator(process.env['BOT_TOKEN']);
   process.on('uncaughtException', (fault) => operator.end(fault));
 
+  if (readStartOptions(args).demo) {
+    const { startDemo } = await import('./demo/start-demo.ts');
+    // Nothing that is set for a real cellar is looked at.
+    return startDemo({ environment: process.env, operator, signal: stopSignal() });
+  }
   const environment = loadEnvironment(process.cwd(), process.env);
   operator = createOperator(environment['BOT_TOKEN']);
   const config = await readConfig(environment);
@@ -27,7 +36,7 @@ export async function start(): Promise<void> {
       return await startTelegram(ground, config.botToken);
     }
     const { startTerminal } = await import('./terminal/start-terminal.ts');
-    await startTerminal(ground);
+    await startTerminal({ ...ground, dataFile: config.dataFile });
   } finally {
     await store.close();
   }

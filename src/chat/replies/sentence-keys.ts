@@ -116,6 +116,10 @@ export interface SentenceValues {
   'day-head': 'day' | 'zone';
   'day-more': never;
   'day-none-such': never;
+  'demo-start': never;
+  'demo-start-end': never;
+  'demo-start-reading': never;
+  'demo-start-sheets': never;
   'dose-bottled': 'vessel';
   'dose-gas': 'amount' | 'count' | 'vessel';
   'dose-gas-too-little': 'amount' | 'vessel';

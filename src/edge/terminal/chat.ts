@@ -22,6 +22,8 @@ export interface TerminalOptions {
   readonly audit?: Audit;
   /** Whether a person sits there: then there is a greeting and a prompt. */
   readonly interactive: boolean;
+  /** The greeting, in the keys of its sentences; the usual one where it is absent. */
+  readonly welcome?: readonly string[];
   /** Ends the chat. */
   readonly signal?: AbortSignal;
 }
@@ -38,11 +40,11 @@ const WELCOME = ['terminal-start', 'terminal-start-example', 'terminal-start-mor
 
 /** The same chat as everywhere, on a keyboard or through a pipe, until the input ends. */
 export async function runTerminal(options: TerminalOptions): Promise<void> {
-  const { input, output, interactive, language, say } = options;
+  const { input, output, interactive, language, say, welcome = WELCOME } = options;
   const show = (text: string): void => void output.write(`${text}\n`);
   const prompt = (): void => void (interactive && output.write(PROMPT));
   if (interactive) {
-    const lines = WELCOME.map((key) => ({ room: 'first' as const, key, values: {} }));
+    const lines = welcome.map((key) => ({ room: 'first' as const, key, values: {} }));
     show(say({ language, lines, buttons: [] }).text);
   }
   prompt();

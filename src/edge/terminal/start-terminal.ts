@@ -1,11 +1,9 @@
 import { handle } from '../../chat/conversation/conversation.ts';
-import { DEFAULT_SETTINGS, type Settings } from '../../chat/conversation/settings.ts';
 import { makeSay } from '../../chat/replies/say.ts';
 import { makeAudit } from '../audit-workings.ts';
 import { systemClock as clock } from '../clock.ts';
 import type { Ground } from '../ground.ts';
 import { loadLocales } from '../locales.ts';
-import { machineZone } from '../machine-zone.ts';
 import { runReminders } from '../reminders/run-reminders.ts';
 import { createWakeUp } from '../reminders/wake-up.ts';
 import { wakingTurn } from '../reminders/waking-turn.ts';
@@ -15,18 +13,28 @@ import { makeServeDue } from '../serve-due.ts';
 import { shownName } from '../shown-name.ts';
 import { AT_TERMINAL, runTerminal, showUnasked } from './chat.ts';
 import { backupPathOf, readNamedFile, writeExport } from './errand-files.ts';
+import { terminalSettings } from './terminal-settings.ts';
+
+/** What a chat on the keyboard stands on. */
+export interface TerminalGround extends Pick<Ground, 'environment' | 'operator' | 'store' | 'signal'> {
+  /** Beside it go exports, and backups of it. */
+  readonly dataFile: string;
+  /** Whether that is a file, of which backups can be made; else the store is in memory. */
+  readonly isFile?: boolean;
+  /** The greeting, in the keys of its sentences; the usual one where it is absent. */
+  readonly welcome?: readonly string[];
+}
 
 /** Serves the chat on the keyboard, and says there what falls due, until the input ends or the program is stopped. */
-export async function startTerminal({ config, environment, operator, store, signal }: Ground): Promise<void> {
+export async function startTerminal(ground: TerminalGround): Promise<void> {
+  const { environment, operator, store, signal, dataFile, isFile = true, welcome } = ground;
   const { stdin: input, stdout: output } = process;
   const interactive = input.isTTY && output.isTTY;
   const { USER, USERNAME, LOGNAME } = environment;
   const name = shownName(USER ?? USERNAME ?? LOGNAME);
-  const zone = machineZone();
-  const settings: Settings = { ...DEFAULT_SETTINGS, ...(zone !== undefined && { zone }) };
+  const settings = terminalSettings();
   const say = makeSay(loadLocales());
   const { tell, report } = operator;
-  const { dataFile } = config;
 
   const wakeUp = createWakeUp();
   const turn = wakingTurn(store, wakeUp);
@@ -38,7 +46,7 @@ export async function startTerminal({ config, environment, operator, store, sign
     serve,
     settings,
     readFile: readNamedFile,
-    backupPath: (now) => backupPathOf(dataFile, now),
+    ...(isFile && { backupPath: (now: number) => backupPathOf(dataFile, now) }),
     handOver: (file) => writeExport(dataFile, file),
     report,
   });
@@ -68,6 +76,7 @@ export async function startTerminal({ config, environment, operator, store, sign
     interactive,
     signal,
     ...(name !== undefined && { name }),
+    ...(welcome !== undefined && { welcome }),
     // A pipe ends with its answer, and waits for nothing more.
     ...(interactive && { audit: makeAudit(tell) }),
   });
