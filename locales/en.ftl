@@ -850,6 +850,7 @@ entry-correction =
     strikes { $entry }: { $reason ->
         [undo] taken back
         [sampled-before] sampled before the addition
+        [edited] the message was edited
        *[other] { $reason }
     }
 round-volume-which = { $vessel }: { $said } does not fit what it held: send it alone.
@@ -1030,6 +1031,106 @@ setting-wrong =
     }
 forgotten-person = Your name is off further sheets. What you noted stays, as person { $number }.
 
+## People, cellars and chats
+
+role =
+    { $role ->
+        [keeper] keeper
+        [hand] hand
+       *[guest] guest
+    }
+cellar-called =
+    { $cellar ->
+        [none] { $keeper ->
+            [none] this cellar
+           *[other] { $keeper }’s cellar
+        }
+       *[other] { $cellar }
+    }
+keeper-called = { $name }
+not-allowed =
+    { $role ->
+        [keeper] That is for a keeper of this cellar
+       *[hand] That is for hands and keepers of this cellar
+    }{ $keepers ->
+        [none] .
+       *[some] : ask { $list }.
+    }
+guest-not-kept = You are a guest here: nothing of this is noted.
+not-of-cellar = You are not of this cellar any more. A keeper of it can invite you: then send me the code.
+invite-how = With which role? Write: invite hand, invite guest or invite keeper
+invite-not-here = I can make no code here.
+invited = Code for one { role }, until { $day }: { $code }
+invited-how =
+    { $link ->
+        [none] Whoever sends me “join” and the code first is in.
+       *[other] Whoever opens this first is in: { $link } (or sends me “join” and the code)
+    }
+joined = You are in { $list }, as { role }.
+joined-before = You were in { $list } already, as { role }. The code is still good.
+joined-how =
+    { $role ->
+        [guest] Ask for any vessel, like: T4?
+       *[other] Send a reading, like: T4 1450 gal pH 3.58 free 21
+    }
+join-unknown = That code is not good, or over. Ask for a new one.
+join-used = That code was used before. Ask for a new one.
+people-head = People of this cellar:
+people-line =
+    { $name }: { role }{ $me ->
+        [me] { " " }(you)
+       *[other] { "" }
+    }
+people-how = To change: invite hand, make Ben a guest, remove Ben
+role-changed =
+    { $role ->
+        [none] { $name } is not of this cellar any more.
+       *[other] { $name } is { role } now.
+    }
+role-same = { $name } is { role } already.
+last-keeper = { $name } is the last keeper. Make somebody else keeper first, like: Ben is keeper
+person-unknown = I know no “{ $text }” here. There are: { $list }.
+person-which = Which “{ $text }”? { $list }. Write it with the number, like: remove person 3
+person-called =
+    { $name ->
+        [none] person { $number }
+       *[other] { $name }
+    }
+at-cellar = { $list }:
+at-now = Now at { $list }.
+at-already = We are at { $list }.
+at-here = We are at { $list }.
+at-others = Others: { $list }. To change: at, and the name
+at-only = There is no other here.
+at-unknown = I know no cellar “{ $text }” here. There are: { $list }.
+at-which = Which “{ $text }”? { $list }.
+cellar-named = This cellar is { $name } now.
+reads-along =
+    { $on ->
+        [on] I answer readings here also when nobody calls me, where vessel and figures are plain.
+       *[off] I answer here only when called.
+    }
+group-joined = Hello. I work out sulfite additions and keep the log of a cellar. Call me by my name, or reply to me.
+group-how = To begin: T4 1450 gal pH 3.58 free 21. More: help
+corrected = Corrected.
+edited-noted = Your edit changes nothing: entry { $entry } ({ $vessel }) stands. If it is wrong: strike { $entry } and why
+edited-added = Your edit changes nothing: { $vessel } had an addition since (entry { $entry }). Send the right figures as a new message.
+edited-late = Your edit changes nothing: that message is older than 15 minutes. Send it as a new one.
+edited-anew = I take no such thing from an edit. Send it as a new message.
+added-it-none =
+    { $vessel ->
+        [none] What went in, and where? Like: added 82 g kmbs T4
+       *[other] What went into { $vessel }? Like: added 82 g kmbs { $vessel }
+    }
+picture-none =
+    { $vessel ->
+        [none] Of which vessel? Like: picture T4
+       *[other] I know nothing of { $vessel } yet, so there is nothing to draw.
+    }
+picture-not-here = I draw no pictures in this chat. In words: { $vessel }?
+stranger = This bot is for invited people. If you have a code, send: join and the code
+too-fast = Too many messages at once: I pass over yours for a minute. Then send again what I did not answer.
+
 ## Files: export and import
 
 export-entry = No.
@@ -1132,3 +1233,50 @@ import-problem = { $code ->
        *[no-vessels] I found no vessel in it. A line looks like: T4; 5200 L; red
     }
 import-nothing-taken = Nothing of it was taken.
+
+## Pictures
+
+picture-unit = SO2 in { $unit }
+picture-free = free { $free } ({ $day })
+picture-total = total { $total } ({ $day })
+picture-bound = bound: the gap between
+picture-odd = free above total
+picture-needed =
+    { $ph ->
+        [no-ph] free needed (pH not known now)
+        [no-target] free needed (no usual target now)
+       *[other] needs { $needed } free at pH { $ph }
+    }
+picture-limit = limit of total { $limit }
+picture-added = added
+picture-added-unknown = added, amount not known
+picture-blended = blended
+
+picture-head = { $vessel } since { $day }. Readings: { $readings }, additions: { $additions }.
+picture-last = { $list }.
+picture-last-free = free { $value } { $unit } ({ $day })
+picture-last-total = total { $value } { $unit } ({ $day })
+picture-last-bound = bound { $value } { $unit }
+picture-needs = pH { $ph } ({ $day }): { $molecular } molecular takes { $needed } free.
+picture-needs-nothing =
+    { $why ->
+        [no-ph] pH not known now, so what free it needs is not either.
+       *[no-target] No usual target for it now.
+    }
+picture-limit-of-total = Limit of total: { $limit }.
+picture-additions =
+    { $earlier ->
+        [none] Added, { $unit }: { $list }.
+       *[other] Added, { $unit }: { $list }; { $earlier } earlier ones.
+    }
+picture-addition =
+    { $added ->
+        [none] not known ({ $day })
+       *[other] { $added } ({ $day })
+    }
+picture-unmeasured = Free not measured since the addition of { $day }.
+picture-came-from = It came from { $vessels } on { $day }: earlier figures are there.
+picture-was-blended = Blended on { $day }: the figures before are of another wine.
+picture-empty = Empty since { $day }.
+picture-is-odd = Free above total ({ $days }): one of the two is wrong, measure again.
+picture-nothing = No picture of { $vessel }: no SO2 measured yet in the wine that is in it.

@@ -2,6 +2,7 @@ import type { CellarStore } from '../core/cellar/cellar-store.ts';
 import type { Errand, IncomingMessage } from '../chat/conversation/ports.ts';
 import type { Settings } from '../chat/conversation/settings.ts';
 import type { Line } from '../chat/replies/reply.ts';
+import { vesselName } from '../chat/replies/vessel-name.ts';
 import type { Said, Say } from '../chat/replies/say.ts';
 import type { ExportFile } from './files/make-export.ts';
 import type { Serve } from './serve-message.ts';
@@ -41,7 +42,7 @@ export function makeRunErrand(
   };
 }
 
-function runErrand(errand: Errand, message: IncomingMessage, errands: Errands): Promise<Brought> {
+async function runErrand(errand: Errand, message: IncomingMessage, errands: Errands): Promise<Brought> {
   switch (errand.kind) {
     case 'export':
       return runExport(errand, message, errands);
@@ -49,6 +50,10 @@ function runErrand(errand: Errand, message: IncomingMessage, errands: Errands): 
       return runImport(errand, message, errands);
     case 'backup':
       return runBackup(message, errands);
+    case 'picture':
+      return {
+        said: [saying('picture-not-here', { vessel: vesselName(errand.vessel) }, message, errands.say)],
+      };
   }
 }
 

@@ -1,5 +1,13 @@
 import type { CellarView } from '../../core/cellar/cellar-store.ts';
+import { codeIn } from './cellar/code.ts';
+import { isForUs } from './cellar/is-for-us.ts';
+import { join } from './cellar/join.ts';
+import { namingCellar } from './cellar/naming-cellar.ts';
+import { permit } from './cellar/permit.ts';
+import { tellsOfDanger } from './cellar/tells-of-danger.ts';
+import { turnAway } from './cellar/turn-away.ts';
 import { scheduleDaily } from './daily.ts';
+import { handleEdited } from './handle-edited.ts';
 import { handleFile } from './handle-file.ts';
 import { arrive, type Here } from './here.ts';
 import { eventKey } from './keys.ts';
@@ -20,21 +28,44 @@ export async function handle(
   view: CellarView,
   defaults: Settings,
 ): Promise<Handled> {
+  const here = await arrive(message, view, defaults);
+  if (!isForUs(here)) return { writes: [], replies: [] };
+  const handled = await handleAddressed(here, view);
+  return namingCellar(handled, message);
+}
+
+async function handleAddressed(here: Here, view: CellarView): Promise<Handled> {
+  const { message } = here;
   const { content } = message;
+  const code = content.kind === 'text' ? codeIn(content.text) : undefined;
+  if (code !== undefined) return greeted(await join(code, here, view), here);
+  if (here.role === undefined && !tellsOfDanger(message)) return shutOut(here, view);
   if (content.kind === 'unreadable') {
     const lines = [line('first', 'unreadable', { what: content.what })];
     return { writes: [], replies: [{ language: message.language, lines, buttons: [] }] };
   }
-  const here = await arrive(message, view, defaults);
   const before = await view.entriesOfKeys(eventKey(message));
   // Delivered again: what it noted stands, and only what is asked is answered anew.
   const fact = before.find(({ kind }) => kind !== 'reading' && kind !== 'vessel');
   if (fact) return alreadyNoted(fact, here);
   const done = { ...here, done: new Set(before.map(({ key }) => key)) };
-  const handled = await handleContent(content, done, view);
+  const handled = await permit(await handleContent(content, done, view), done, view);
+  if (here.role === undefined) return { writes: [], replies: handled.replies };
   const notes = handled.writes.some(({ kind }) => kind === 'entry');
   const daily = notes ? await scheduleDaily(done, view) : [];
-  return { ...handled, writes: [...greeting(done), ...handled.writes, ...daily] };
+  return greeted({ ...handled, writes: [...handled.writes, ...daily] }, done);
+}
+
+/** Whoever writes for the first time is known from then on; whom nothing was kept of is not. */
+function greeted(handled: Handled, here: Here): Handled {
+  const isKnown = here.role !== undefined || handled.writes.length > 0;
+  return isKnown ? { ...handled, writes: [...greeting(here), ...handled.writes] } : handled;
+}
+
+/** Somebody who was removed, or whose chat is in this cellar no more. */
+async function shutOut({ message }: Here, view: CellarView): Promise<Handled> {
+  const told = await turnAway(message, 'not-of-cellar', view);
+  return message.isJoined ? { ...told, place: { does: 'leave', cellar: message.cellar } } : told;
 }
 
 function handleContent(
@@ -45,6 +76,8 @@ function handleContent(
   switch (content.kind) {
     case 'text':
       return handleText(content.text, here, view);
+    case 'edited':
+      return handleEdited(content, here, view);
     case 'press':
       return handlePress(content.key, here, view);
     case 'file':

@@ -62,9 +62,13 @@ function followsChoice({ lastButtons, lastWasChosen }: Memory): boolean {
 }
 
 /** "I added it": what was reckoned for that vessel last went in, or what stands above. */
-function addedAsPlanned({ intent, fields, asks, problems }: Reading, here: Here): string | undefined {
+function addedAsPlanned(
+  { intent, fields, asks, problems, command }: Reading,
+  here: Here,
+): string | undefined {
   const { vessel, ...others } = fields;
-  if (intent !== 'added' || !asks.includes('mass_g') || problems.length > 0) return undefined;
+  const isBare = intent === 'added' && asks.includes('mass_g') && problems.length === 0;
+  if (!isBare && command?.name !== 'added-it') return undefined;
   if (Object.keys(others).some((name) => name !== 'additive')) return undefined;
   if (vessel === undefined) return here.memory.lastButtons.find((key) => parseKey(key)?.does === 'a');
   const plan = here.plans.get(vessel);

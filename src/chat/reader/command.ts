@@ -43,6 +43,9 @@ export type Setting =
   | { readonly of: 'ph-days'; readonly days: number }
   | { readonly of: 'check-days'; readonly of_what: 'usual' | 'often'; readonly days: number };
 
+/** What somebody may do in a cellar, as it is said. */
+export type SaidRole = 'keeper' | 'hand' | 'guest';
+
 /** Which entries are taken away. */
 export type Span =
   | { readonly is: 'month' } // this month
@@ -88,4 +91,14 @@ export type Command =
   | { readonly name: 'moved'; readonly to: string } // `volume_L` where only a part was moved
   | { readonly name: 'blended'; readonly to: string }
   | { readonly name: 'emptied' }
-  | { readonly name: 'lot'; readonly lot: string };
+  | { readonly name: 'lot'; readonly lot: string }
+  | { readonly name: 'picture' } // picture T4
+  | { readonly name: 'added-it' } // what was reckoned last, or for the vessel named, went in
+  | { readonly name: 'invite'; readonly role?: SaidRole }
+  | { readonly name: 'join'; readonly code: string }
+  | { readonly name: 'people' }
+  | { readonly name: 'remove-person'; readonly who: string }
+  | { readonly name: 'make-person'; readonly who: string; readonly role: SaidRole }
+  | { readonly name: 'at'; readonly cellar?: string } // at Blanca; without a name they are listed
+  | { readonly name: 'name-cellar'; readonly as: string }
+  | { readonly name: 'read-along'; readonly on: boolean };

@@ -1,6 +1,7 @@
 import fc from 'fast-check';
 import { expect, test } from 'vitest';
 import { answerReading } from '../../../src/chat/conversation/answer-reading.ts';
+import { readRoster } from '../../../src/chat/conversation/cellar/roster.ts';
 import { NO_FACTS, type Here } from '../../../src/chat/conversation/here.ts';
 import { FRESH_MEMORY } from '../../../src/chat/conversation/memory.ts';
 import { mannerOf } from '../../../src/chat/conversation/manner.ts';
@@ -93,6 +94,8 @@ const HERE: Here = {
   settings: DEFAULT_SETTINGS,
   me: 1,
   isNewPerson: true,
+  roster: readRoster(undefined),
+  role: 'keeper',
   nextEntry: 1,
   isZoneAsked: false,
   done: new Set(),

@@ -86,7 +86,7 @@ function wholeDose(reading: Reading, request: DoseRequest, answer: DoseAnswer, t
     ],
     buttons: doseButtons(ref, {
       mayBeNoted:
-        here.role !== 'guest' &&
+        turn.here.role !== 'guest' &&
         vesselsIn(reading.fields).length > 0 &&
         toBeWeighed(reading, answer) !== undefined,
       stageAssumed: reading.assumed.stage !== undefined,

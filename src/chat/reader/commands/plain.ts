@@ -43,6 +43,13 @@ const FORMS: readonly Form[] = [
   { command: { name: 'backup' }, needs: ['backup'], may: ['now', 'all'], isAct: true },
   { command: { name: 'forget-me' }, needs: ['forget-me'], isAct: true },
   { command: { name: 'forget' }, needs: ['forget'], ofVessel: true, isAct: true },
+  { command: { name: 'picture' }, needs: ['picture'], may: ['show', 'of', 'for'], ofVessel: true },
+  { command: { name: 'picture' }, needs: ['picture'], may: ['show'] },
+  { command: { name: 'added-it' }, needs: ['added-it'], may: ['done'], isAct: true },
+  { command: { name: 'added-it' }, needs: ['done'], isAct: true },
+  { command: { name: 'people' }, needs: ['people'], may: ['show', 'all'] },
+  { command: { name: 'read-along', on: true }, needs: ['read-along'], isAct: true },
+  { command: { name: 'read-along', on: false }, needs: ['only-called'], isAct: true },
 ];
 
 const fits = (talk: Talk, { needs, may = [], ofVessel = false, isAct }: Form): boolean =>
@@ -65,9 +72,18 @@ const isNotVessel = ({ board, said, isOfVessel, isQuestion }: Talk): boolean =>
   said[0].ids.includes('not') &&
   board.findings[0]?.from === 1;
 
+/** `done T4`, in that order; the other way round it may be any work. */
+const isDoneVessel = ({ board, said, isOfVessel, isQuestion }: Talk): boolean =>
+  isOfVessel &&
+  !isQuestion &&
+  said.length === 1 &&
+  said[0]?.text === 'done' &&
+  said[0].from < (board.findings[0]?.from ?? 0);
+
 /** Reads what takes nothing but a vessel: `T4?`, `vessels`, `undo`, `what is due`, `not T4`. */
 export function readPlain(talk: Talk): Command | undefined {
   if (isVesselAlone(talk)) return { name: 'vessel' };
   if (isNotVessel(talk)) return { name: 'unwatch' };
+  if (isDoneVessel(talk)) return { name: 'added-it' };
   return FORMS.find((form) => fits(talk, form))?.command;
 }

@@ -6,11 +6,14 @@ import { MONTHS, WEEKDAYS } from '../moments/calendar.ts';
 import { emptyReading } from '../empty-reading.ts';
 import type { Draft } from '../understood.ts';
 import type { OwnWordId } from '../words/words.ts';
+import { readCellarWord } from './cellar-word.ts';
 import { readDay } from './day.ts';
 import { readExport } from './export.ts';
 import { readImport } from './import.ts';
+import { readJoin } from './join.ts';
 import { readLater } from './later.ts';
 import { readOrder } from './order.ts';
+import { readPersonWord } from './person-word.ts';
 import { readPlain } from './plain.ts';
 import { readSetting } from './settings.ts';
 import { readStatement } from './statement.ts';
@@ -21,13 +24,15 @@ import { talkOf } from './talk.ts';
 /** A command has not more terms, unless it ends in a reason or the name of a file; own threshold. */
 const MOST_TERMS = 24;
 
-const LONG: readonly ((talk: Talk) => Command | undefined)[] = [readStrike, readImport];
+const LONG: readonly ((talk: Talk) => Command | undefined)[] = [readStrike, readImport, readJoin];
 const SHORT: readonly ((talk: Talk) => Command | undefined)[] = [
   readPlain,
   readDay,
   readLater,
   readExport,
   readSetting,
+  readPersonWord,
+  readCellarWord,
 ];
 
 /** The words without which nothing is talk to the bot. */
@@ -36,6 +41,8 @@ const OPENERS: ReadonlySet<OwnWordId> = new Set([
   'order', 'orders', 'open', 'due', 'later', 'remind', 'not', 'unwatch', 'watch', 'settings', 'export', 'import', 'backup', 'forget',
   'forget-me', 'units', 'work-in', 'metric', 'us', 'imperial', 'usual', 'usual-bare', 'reds', 'whites', 'sweets', 'target', 'quiet', 'daily',
   'zone', 'we-are-in', 'allowance', 'basis', 'replies', 'counts', 'every',
+  'picture', 'added-it', 'done', 'invite', 'keeper', 'hand', 'guest', 'people', 'remove', 'join', 'at-cellar', 'cellars', 'cellar-is', 'name-cellar',
+  'read-along', 'only-called',
 ]); // prettier-ignore
 
 /** Whether a message could be talk to the bot at all: one of its own words opens it, it is a day, or asks for a vessel. */

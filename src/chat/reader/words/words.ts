@@ -64,6 +64,8 @@ export type OwnWordId =
   | 'to' | 'from' | 'with' | 'of' | 'off-lees' | 'finished' | 'two-meanings' | 'ml-way' | 'lot' | 'number' | 'remark' | 'remark-bare' | 'bottled'
   | 'sampled' | 'at' | 'on' | 'until' | 'moment-bar' | 'this-morning' | 'last-night' | 'part-of-day' | 'ago' | 'am'
   | 'pm' | 'oclock' | 'noon' | 'hour' | 'minute' | 'day' | 'week' | 'ordinal'
+  | 'picture' | 'added-it' | 'done' | 'invite' | 'keeper' | 'hand' | 'guest' | 'as-role' | 'people' | 'remove' | 'make-role' | 'join' | 'at-cellar' | 'cellars'
+  | 'cellar-is' | 'name-cellar' | 'read-along' | 'only-called'
   | 'count-half' | 'count-1' | 'count-2' | 'count-3' | 'count-4' | 'count-5' | 'count-6'; // prettier-ignore
 
 /** The groups of words that together make an emergency; `emergency.ts` holds the rules. */

@@ -2,8 +2,14 @@ import type { CellarView } from '../../../../core/cellar/cellar-store.ts';
 import type { Reading } from '../../../reader/understood.ts';
 import { withVessels, type Here } from '../../here.ts';
 import { line } from '../../lines/line.ts';
+import { vesselText } from '../../lines/vessel.ts';
 import type { Handled } from '../../ports.ts';
 import { replying } from '../../replying.ts';
+import { join } from '../../cellar/join.ts';
+import { goTo, nameCellar, readAlong } from './cellars.ts';
+import { invite } from './invite.ts';
+import { changeRole, listPeople } from './people.ts';
+import { drawPicture } from './picture.ts';
 import { daySheet, historySheet } from './sheets.ts';
 import { forgetPerson } from './forget-person.ts';
 import { listVessels, listDue, listOrders } from './lists.ts';
@@ -17,10 +23,11 @@ import { vesselSheet } from './vessel-sheet.ts';
  * answered like any other reading.
  */
 export async function answerCommand(
-  { command, fields }: Reading,
+  reading: Reading,
   here: Here,
   view: CellarView,
 ): Promise<Handled | undefined> {
+  const { command, fields } = reading;
   switch (command?.name) {
     case 'vessel':
       return vesselSheet(fields.vessel, here);
@@ -53,6 +60,26 @@ export async function answerCommand(
       return takeAway(command, fields.vessel, here);
     case 'forget-me':
       return forgetPerson(here, view);
+    case 'picture':
+      return drawPicture(fields.vessel, here);
+    case 'added-it':
+      return replying(here, { lines: [line('first', 'added-it-none', { vessel: vesselText(reading) })] });
+    case 'invite':
+      return invite(command.role, here, view);
+    case 'join':
+      return join(command.code, here, view);
+    case 'people':
+      return listPeople(here, view);
+    case 'remove-person':
+      return changeRole(command.who, 'none', here, view);
+    case 'make-person':
+      return changeRole(command.who, command.role, here, view);
+    case 'at':
+      return goTo(command.cellar, here, view);
+    case 'name-cellar':
+      return nameCellar(command.as, here);
+    case 'read-along':
+      return readAlong(command.on, here);
     case 'order':
     case 'later':
     case 'unwatch':
