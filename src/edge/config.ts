@@ -11,18 +11,28 @@ export interface Config {
   readonly logLevel: LogLevel;
   /** The cellar's file. */
   readonly dataFile: string;
-  /** Variables that are set and right, but that this version does nothing with. */
-  readonly notServedYet: readonly string[];
+  /** Where the server of health and figures listens, and of the webhook; absent: there is none. */
+  readonly port?: number;
+  /** Where the platform brings updates to; absent: they are polled. */
+  readonly webhook?: { readonly url: string; readonly secret?: string };
 }
 
-const SERVED = ['BOT_TOKEN', 'BOT_API_ROOT', 'LOG_LEVEL', 'DATA_FILE'] as const;
-const NOT_SERVED_YET = ['WEBHOOK_URL', 'WEBHOOK_SECRET', 'PORT'] as const;
+const NAMES = [
+  'BOT_TOKEN',
+  'BOT_API_ROOT',
+  'LOG_LEVEL',
+  'DATA_FILE',
+  'WEBHOOK_URL',
+  'WEBHOOK_SECRET',
+  'PORT',
+] as const;
+/** Where a webhook is served unless it is said. */
+const USUAL_PORT = 8080;
 
 const USUAL: Config = {
   botApiRoot: 'https://api.telegram.org',
   logLevel: 'info',
   dataFile: 'data/cellar.db',
-  notServedYet: [],
 };
 
 /**
@@ -32,21 +42,25 @@ const USUAL: Config = {
  * @throws OperatorError with one sentence for each variable that is wrong.
  */
 export async function readConfig(environment: Environment): Promise<Config> {
-  const set = [...SERVED, ...NOT_SERVED_YET]
-    .map((name) => [name, environment[name]?.trim() ?? ''] as const)
-    .filter(([, value]) => value !== '');
+  const set = NAMES.map((name) => [name, environment[name]?.trim() ?? ''] as const).filter(
+    ([, value]) => value !== '',
+  );
   // Nobody who only wants the terminal chat waits for the checks to load.
   if (set.length === 0) return USUAL;
   const { VARIABLES } = await import('./variables.ts');
   const read = VARIABLES.safeParse(Object.fromEntries(set));
   if (!read.success) throw new OperatorError(read.error.issues.map((issue) => issue.message).join('\n'));
-  const { BOT_TOKEN, BOT_API_ROOT = USUAL.botApiRoot } = read.data;
+  const { BOT_TOKEN, BOT_API_ROOT = USUAL.botApiRoot, WEBHOOK_URL, WEBHOOK_SECRET } = read.data;
   const { LOG_LEVEL = USUAL.logLevel, DATA_FILE = USUAL.dataFile } = read.data;
+  const port = read.data.PORT ?? (WEBHOOK_URL === undefined ? undefined : USUAL_PORT);
   return {
-    ...(BOT_TOKEN === undefined ? {} : { botToken: BOT_TOKEN }),
+    ...(BOT_TOKEN !== undefined && { botToken: BOT_TOKEN }),
     botApiRoot: BOT_API_ROOT.replace(/\/+$/, ''),
     logLevel: LOG_LEVEL,
     dataFile: DATA_FILE,
-    notServedYet: NOT_SERVED_YET.filter((name) => read.data[name] !== undefined),
+    ...(port !== undefined && { port: Number(port) }),
+    ...(WEBHOOK_URL !== undefined && {
+      webhook: { url: WEBHOOK_URL, ...(WEBHOOK_SECRET !== undefined && { secret: WEBHOOK_SECRET }) },
+    }),
   };
 }

@@ -6,14 +6,15 @@ import { readStartOptions } from './start-options.ts';
 import { stopSignal } from './stop-signal.ts';
 
 /**
- * Joins the parts and serves: on Telegram where a token is set, else in the terminal, and the demo there always.
- * Resolves at a clean stop.
+ * Does what the command line asks for. Mostly it joins the parts and serves: on Telegram where a token is set, else in the
+ * terminal, and the demo there always. Resolves at a clean stop.
  */
 export async function start(args: readonly string[]): Promise<void> {
   let operator = createOperator(process.env['BOT_TOKEN']);
   process.on('uncaughtException', (fault) => operator.end(fault));
 
-  if (readStartOptions(args).demo) {
+  const options = readStartOptions(args);
+  if (options.does === 'demo') {
     const { startDemo } = await import('./demo/start-demo.ts');
     // Nothing that is set for a real cellar is looked at.
     return startDemo({ environment: process.env, operator, signal: stopSignal() });
@@ -21,8 +22,12 @@ export async function start(args: readonly string[]): Promise<void> {
   const environment = loadEnvironment(process.cwd(), process.env);
   operator = createOperator(environment['BOT_TOKEN']);
   const config = await readConfig(environment);
-  for (const name of config.notServedYet) operator.tell(`${name} is not served yet; it changes nothing.`);
 
+  if (options.does === 'restore' || options.does === 'rebuild') {
+    const { runUpkeep } = await import('./upkeep/run-upkeep.ts');
+    process.stdout.write(`${await runUpkeep(options, { dataFile: config.dataFile, operator })}\n`);
+    return;
+  }
   const { openSqliteStore } = await import('./store/sqlite/open-sqlite-store.ts');
   const store = await openSqliteStore(config.dataFile, {
     now: clock.now,

@@ -28,10 +28,12 @@ export const VARIABLES = z.object({
     .string()
     .regex(/[^/\\]$/, 'DATA_FILE is not a file: it must not end in a slash, or be left out.')
     .optional(),
-  WEBHOOK_URL: url(
-    /^https:$/,
-    'WEBHOOK_URL is not an address: it must begin with https://, or be left out.',
-  ).optional(),
+  WEBHOOK_URL: url(/^https:$/, 'WEBHOOK_URL is not an address: it must begin with https://, or be left out.')
+    .refine(
+      (text) => !URL.canParse(text) || new URL(text).pathname !== '/',
+      'WEBHOOK_URL needs a path of its own: put a word that nobody guesses behind the host.',
+    )
+    .optional(),
   WEBHOOK_SECRET: z
     .string()
     .regex(/^[\w-]{1,256}$/, 'WEBHOOK_SECRET must be 1 to 256 letters, digits, _ or -, or be left out.')

@@ -6,7 +6,6 @@ const USUAL = {
   botApiRoot: 'https://api.telegram.org',
   logLevel: 'info',
   dataFile: 'data/cellar.db',
-  notServedYet: [],
 };
 
 describe('the configuration', () => {
@@ -22,10 +21,16 @@ describe('the configuration', () => {
     ],
     ['a level is set', { LOG_LEVEL: 'silent' }, { ...USUAL, logLevel: 'silent' }],
     ['a file is set', { DATA_FILE: 'other place/a.db' }, { ...USUAL, dataFile: 'other place/a.db' }],
+    ['a port is set', { PORT: '8443' }, { ...USUAL, port: 8443 }],
     [
-      'variables of later versions are set',
-      { WEBHOOK_URL: 'https://cellar.example/in', WEBHOOK_SECRET: 'a_b-1', PORT: '8443' },
-      { ...USUAL, notServedYet: ['WEBHOOK_URL', 'WEBHOOK_SECRET', 'PORT'] },
+      'a webhook is set',
+      { WEBHOOK_URL: 'https://cellar.example/in' },
+      { ...USUAL, port: 8080, webhook: { url: 'https://cellar.example/in' } },
+    ],
+    [
+      'a webhook is set with its secret and a port',
+      { WEBHOOK_URL: 'https://cellar.example/in', WEBHOOK_SECRET: 'a_b-1', PORT: '0' },
+      { ...USUAL, port: 0, webhook: { url: 'https://cellar.example/in', secret: 'a_b-1' } },
     ],
   ])('is understood when %s', async (_, environment, config) => {
     expect(await readConfig(environment)).toEqual(config);
@@ -39,6 +44,7 @@ describe('the configuration', () => {
     ['LOG_LEVEL', 'loud'],
     ['DATA_FILE', 'data/'],
     ['WEBHOOK_URL', 'http://cellar.example/in'],
+    ['WEBHOOK_URL', 'https://cellar.example'],
     ['WEBHOOK_SECRET', 'with a space'],
     ['PORT', '70000'],
     ['PORT', '-1'],

@@ -35,6 +35,7 @@ const PACKAGES: readonly { readonly name: RegExp; readonly in: RegExp; readonly 
     why: 'a second platform must need no change elsewhere',
   },
   { name: /^kysely$/, in: /^src\/edge\/store\//, why: 'queries are written in one room' },
+  { name: /^prom-client$/, in: /^src\/edge\/http\//, why: 'what is counted is told in one room' },
   { name: /^@fluent\//, in: /^src\/(chat\/replies|edge)\//, why: 'sentences are made in one room' },
   {
     name: /^(csv-(parse|stringify)(\/.*)?|(read|write)-excel-file\/.*|fflate)$/,

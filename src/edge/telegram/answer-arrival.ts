@@ -6,6 +6,7 @@ import type { Reply } from '../../chat/replies/reply.ts';
 import type { Say } from '../../chat/replies/say.ts';
 import type { Audit } from '../audit-workings.ts';
 import type { Clock } from '../clock.ts';
+import { NO_METER, type Meter } from '../http/meter.ts';
 import type { Log } from '../logging.ts';
 import type { ServeTurn } from '../serve-message.ts';
 import { StoreError } from '../store/store-error.ts';
@@ -27,6 +28,7 @@ export interface AnswerOptions {
   readonly sendNow: (posts: readonly Post[]) => Promise<void>;
   /** Ends the waiting mark on a tapped button. Never rejects. */
   readonly tellTapSeen: (tapId: string) => Promise<void>;
+  readonly meter?: Meter;
   readonly clock: Clock;
   readonly log: Log;
   /** Aborted when there is no time left. */
@@ -46,10 +48,23 @@ const LONGEST_CAUSE = 500;
  * nothing is answered twice and everything is answered.
  */
 export function makeHandling(options: AnswerOptions): Handling {
-  const { serve, say, store, audit, send, sendNow, tellTapSeen, clock, log, signal } = options;
+  const {
+    serve,
+    say,
+    store,
+    audit,
+    send,
+    sendNow,
+    tellTapSeen,
+    clock,
+    log,
+    signal,
+    meter = NO_METER,
+  } = options;
 
   const answer = async (arrival: Arrival): Promise<void> => {
     if (arrival.tapId !== undefined) void tellTapSeen(arrival.tapId);
+    const begun = performance.now();
     let failure: unknown;
     for (const wait_ms of [0, ...TRY_WAITS_MS]) {
       if (wait_ms > 0) await clock.wait(wait_ms, signal);
@@ -61,6 +76,7 @@ export function makeHandling(options: AnswerOptions): Handling {
           return [handled(arrival), ...posts.map(writePost)];
         });
         send(posts);
+        meter.handled('answered', (performance.now() - begun) / 1000);
         audit?.(answers);
         return;
       } catch (error) {
@@ -74,11 +90,13 @@ export function makeHandling(options: AnswerOptions): Handling {
     log.error({ err: cause, update: arrival.updateId }, 'a message could not be answered');
     const { language } = arrival.message;
     const reply = cause instanceof StoreError ? faultReply(language, true) : asideReply(language);
+    meter.handled('aside', 0);
     await end([arrival], reply, String(cause).slice(0, LONGEST_CAUSE));
   };
 
   const leave: Handling['leave'] = async (arrivals) => {
     log.warn({ left: arrivals.length }, 'messages of long ago are left unread');
+    for (const _ of arrivals) meter.handled('left', 0);
     await end(arrivals, leftReply(arrivals[0].message.language, arrivals.length));
   };
 

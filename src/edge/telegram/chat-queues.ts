@@ -1,3 +1,5 @@
+import type { Depth } from '../http/meter.ts';
+
 /** What waits in a queue knows since when. */
 interface Queued {
   readonly received_at: number;
@@ -6,10 +8,11 @@ interface Queued {
 /** Queues of chats: what waits in one is handled in order, and those of different chats side by side. */
 export interface ChatQueues<T> {
   readonly add: (chatId: number, one: T) => void;
-  /** How many wait or are in hand, and since when the oldest does (milliseconds since 1970). */
-  readonly state: () => { readonly count: number; readonly oldest_at?: number };
-  /** Resolves when no more than so many wait or are in hand, or when the work has stopped. */
-  readonly atMost: (count: number) => Promise<void>;
+  /** How many wait or are in hand. */
+  readonly count: () => number;
+  readonly depth: () => Depth;
+  /** Resolves when nothing waits, or when the work has stopped. */
+  readonly idle: () => Promise<void>;
 }
 
 /**
@@ -23,9 +26,6 @@ export function createChatQueues<T extends Queued>(
   let count = 0;
   let running = 0;
   let watchers: (() => void)[] = [];
-  const look = (): void => {
-    for (const watcher of watchers.splice(0)) watcher();
-  };
 
   const run = async (chatId: number, queue: T[]): Promise<void> => {
     running += 1;
@@ -34,11 +34,10 @@ export function createChatQueues<T extends Queued>(
       if (done === 0) break;
       queue.splice(0, done);
       count -= done;
-      if (watchers.length > 0) look();
     }
     queues.delete(chatId);
     running -= 1;
-    look();
+    if (running === 0) for (const watcher of watchers.splice(0)) watcher();
   };
 
   return {
@@ -50,16 +49,14 @@ export function createChatQueues<T extends Queued>(
       queues.set(chatId, made);
       void run(chatId, made);
     },
-    state: () => {
+    count: () => count,
+    depth: () => {
       const firsts = [...queues.values()].flatMap(([first]) => (first === undefined ? [] : [first]));
       if (firsts.length === 0) return { count };
       return { count, oldest_at: Math.min(...firsts.map(({ received_at }) => received_at)) };
     },
-    atMost: async (most) => {
-      while (count > most && running > 0)
-        await new Promise<void>((resolve) => {
-          watchers = [...watchers, resolve];
-        });
+    idle: async () => {
+      while (running > 0) await new Promise<void>((resolve) => (watchers = [...watchers, resolve]));
     },
   };
 }

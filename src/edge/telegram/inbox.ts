@@ -1,5 +1,6 @@
 import type { Mailbox, Waiting } from '../../core/cellar/mailbox.ts';
 import type { Clock } from '../clock.ts';
+import { NO_METER, type Depth, type Meter } from '../http/meter.ts';
 import { CHANNEL } from './channel.ts';
 import { createChatQueues } from './chat-queues.ts';
 import { toMessage, type Arrival } from './to-message.ts';
@@ -10,6 +11,7 @@ export interface InboxOptions {
   readonly store: Pick<Mailbox, 'receive' | 'waiting' | 'countTry'>;
   readonly handling: Handling;
   readonly clock: Clock;
+  readonly meter?: Meter;
   /** Aborted when there is no time left: what is not handled stays in the store. */
   readonly signal: AbortSignal;
 }
@@ -29,23 +31,19 @@ export interface Inbox {
   readonly receive: (updates: readonly TelegramUpdate[]) => Promise<void>;
   /** Takes up what an earlier process has left. */
   readonly recover: () => Promise<void>;
-  /** Resolves when so little is in hand that more may come. */
-  readonly roomy: () => Promise<void>;
-  /** How many are in hand, and since when the oldest is (milliseconds since 1970). */
-  readonly state: () => { readonly count: number; readonly oldest_at?: number };
+  readonly count: () => number;
+  readonly depth: () => Depth;
   /** Resolves when nothing is in hand, or when there is no time left. */
   readonly idle: () => Promise<void>;
 }
 
-/** Beyond so many in hand the rest stays with the platform. */
-const MOST_IN_HAND = 2000;
 /** What was in hand alone in so many processes that ended badly is what ended them. */
 const MOST_TRIES = 4;
 /** What was sent longer ago is answered no more: the wine is another by now. */
 const STALE_MS = 12 * 60 * 60 * 1000;
 
 /** Makes an inbox. */
-export function createInbox({ store, handling, clock, signal }: InboxOptions): Inbox {
+export function createInbox({ store, handling, clock, meter = NO_METER, signal }: InboxOptions): Inbox {
   const isStale = ({ message }: Arrival): boolean => message.at < clock.now() - STALE_MS;
   const queues = createChatQueues<Arrival>(async (queue) => {
     if (signal.aborted) return 0;
@@ -76,7 +74,9 @@ export function createInbox({ store, handling, clock, signal }: InboxOptions): I
         known.set(update.update_id, arrival);
         return [{ channel: CHANNEL, number: update.update_id, body: JSON.stringify(update), received_at }];
       });
-      for (const { number } of await store.receive(arrived)) {
+      const fresh = await store.receive(arrived);
+      meter.received(fresh.length);
+      for (const { number } of fresh) {
         const arrival = known.get(number);
         if (arrival !== undefined) queues.add(arrival.chatId, arrival);
       }
@@ -97,8 +97,8 @@ export function createInbox({ store, handling, clock, signal }: InboxOptions): I
       );
       for (const { arrival } of others) queues.add(arrival.chatId, arrival);
     },
-    roomy: () => queues.atMost(MOST_IN_HAND),
-    state: queues.state,
-    idle: () => queues.atMost(0),
+    count: queues.count,
+    depth: queues.depth,
+    idle: () => queues.idle(),
   };
 }

@@ -1,6 +1,7 @@
 import type { Mailbox, Post } from '../../core/cellar/mailbox.ts';
 import type { Clock } from '../clock.ts';
 import type { Log } from '../logging.ts';
+import { NO_METER, type Depth, type Meter } from '../http/meter.ts';
 import { CHANNEL } from './channel.ts';
 import { mergePosts, type Parcel } from './merge-posts.ts';
 import { createGate, createWindow, type Limits, type Window } from './pace.ts';
@@ -14,8 +15,7 @@ export interface OutboxOptions {
   readonly limits: Limits;
   readonly clock: Clock;
   readonly log: Log;
-  /** Told how each sending ended. */
-  readonly onSent?: (sent: Sent['kind'], posts: readonly Post[]) => void;
+  readonly meter?: Meter;
   /** Told that a group has got another name: its cellar goes with it. */
   readonly onMoved?: (from: string, to: string) => void;
   /** Aborted when there is no time left: what is not sent stays in the store. */
@@ -26,8 +26,8 @@ export interface OutboxOptions {
 export interface Outbox {
   /** Takes posts that the store keeps. */
   readonly add: (posts: readonly Post[]) => void;
-  /** How many wait, and since when the oldest does (milliseconds since 1970). */
-  readonly state: () => { readonly count: number; readonly oldest_at?: number };
+  readonly count: () => number;
+  readonly depth: () => Depth;
   /** Resolves when nothing waits, or when there is no time left. */
   readonly idle: () => Promise<void>;
 }
@@ -49,12 +49,13 @@ const MOST_WINDOWS = 5000;
 
 /** Makes an outbox; a chat for which nothing waits takes next to no memory. */
 export function createOutbox(options: OutboxOptions): Outbox {
-  const { store, send, limits, clock, log, signal, onSent, onMoved } = options;
+  const { store, send, limits, clock, log, signal, onMoved, meter = NO_METER } = options;
   const lanes = new Map<string, Lane>();
   const running = new Set<Promise<void>>();
   const windows = new Map<string, Window>();
   const gate = createGate(createWindow(limits.all), clock);
   const slowDowns = createSlowDowns();
+  let count = 0;
 
   const windowOf = (chat: string): Window => {
     const known = windows.get(chat);
@@ -85,7 +86,8 @@ export function createOutbox(options: OutboxOptions): Outbox {
       const parcel = waited ? mergePosts(first, lane.posts) : { posts: [first], body: first.body };
       windowOf(lane.chat).note(clock.now());
       const sent = await send({ chat: lane.chat, body: parcel.body });
-      onSent?.(sent.kind, parcel.posts);
+      if (sent.kind === 'sent') meter.sent();
+      else if (!signal.aborted) meter.refused(sent.kind);
       await react(lane, parcel, sent);
       if (lane.posts.length === 0) break;
     }
@@ -127,6 +129,7 @@ export function createOutbox(options: OutboxOptions): Outbox {
     const ids = posts.map(({ id }) => id);
     await persist(() => store.settle(CHANNEL, ids));
     lane.posts.splice(0, posts.length);
+    count -= posts.length;
   };
 
   const move = async (lane: Lane, chat: string): Promise<void> => {
@@ -135,6 +138,7 @@ export function createOutbox(options: OutboxOptions): Outbox {
     await persist(() => store.readdress(CHANNEL, ids, chat));
     onMoved?.(from, chat);
     lanes.delete(from);
+    count -= posts.length;
     add(posts.splice(0).map((post) => ({ ...post, chat })));
   };
 
@@ -151,6 +155,7 @@ export function createOutbox(options: OutboxOptions): Outbox {
   };
 
   const add = (posts: readonly Post[]): void => {
+    count += posts.length;
     for (const post of posts) {
       const known = lanes.get(post.chat);
       if (known !== undefined) {
@@ -167,10 +172,13 @@ export function createOutbox(options: OutboxOptions): Outbox {
 
   return {
     add,
-    state: () => {
-      const waiting = [...lanes.values()].flatMap((lane) => lane.posts);
-      if (waiting.length === 0) return { count: 0 };
-      return { count: waiting.length, oldest_at: Math.min(...waiting.map(({ at }) => at)) };
+    count: () => count,
+    depth: () => {
+      const firsts = [...lanes.values()].flatMap(({ posts: [first] }) =>
+        first === undefined ? [] : [first],
+      );
+      if (firsts.length === 0) return { count };
+      return { count, oldest_at: Math.min(...firsts.map(({ at }) => at)) };
     },
     idle: async () => {
       while (running.size > 0) await Promise.all(running);

@@ -34,7 +34,7 @@ export function openPlatform({ token, root, callTimeout_s, sendTimeout_s }: Plat
   // Connections of their own for each, so that replies that hang never keep a poll from being made.
   const open = (timeoutSeconds: number) => {
     const fetch = createLeanFetch();
-    return { api: new Api(token, { apiRoot: root, timeoutSeconds, fetch }), close: fetch.close };
+    return { api: new Api(token, { apiRoot: root, timeoutSeconds, fetch }), close: () => fetch.close() };
   };
   const [calls, sends] = [open(callTimeout_s), open(sendTimeout_s)];
   return {

@@ -10,7 +10,9 @@ import { ALLOWED_UPDATES, readUpdates } from './update.ts';
 /** What polling needs. */
 export interface PollOptions {
   readonly api: Api;
-  readonly inbox: Pick<Inbox, 'receive' | 'roomy'>;
+  readonly inbox: Pick<Inbox, 'receive'>;
+  /** Whether so much is in hand that more has to stay with the platform. */
+  readonly isFull: () => boolean;
   readonly backOff: BackOff;
   readonly clock: Clock;
   /** How long the platform holds a poll open when there is nothing, in seconds. */
@@ -20,6 +22,9 @@ export interface PollOptions {
   readonly signal: AbortSignal;
 }
 
+/** So soon it is looked whether there is room again, in milliseconds. */
+const FULL_WAIT_MS = 20;
+
 /**
  * Reads updates until the signal is aborted: a batch is received into the inbox, and only when it is durable does
  * the next poll confirm it. Gives back the offset that is to be confirmed next.
@@ -27,8 +32,7 @@ export interface PollOptions {
  * @throws OperatorError when the token is no longer accepted.
  */
 export async function poll(options: PollOptions): Promise<number> {
-  const { api, inbox, backOff, signal } = options;
-  const stopped = new Promise<void>((resolve) => signal.addEventListener('abort', () => resolve()));
+  const { api, inbox, isFull, backOff, clock, signal } = options;
   let offset = 0;
   while (!signal.aborted) {
     try {
@@ -36,7 +40,7 @@ export async function poll(options: PollOptions): Promise<number> {
       await inbox.receive(updates);
       for (const { update_id } of updates) offset = Math.max(offset, update_id + 1);
       backOff.succeeded();
-      await Promise.race([inbox.roomy(), stopped]);
+      while (isFull() && !signal.aborted) await clock.wait(FULL_WAIT_MS, signal);
     } catch (error) {
       if (signal.aborted) break;
       // The operator asked for polling, so a webhook that stands in the way goes.

@@ -6,20 +6,17 @@ import type { Log } from '../logging.ts';
 import type { WakeUp } from '../reminders/wake-up.ts';
 import type { ServeDue } from '../serve-due.ts';
 import type { ServeTurn } from '../serve-message.ts';
-import { makeHandling } from './answer-arrival.ts';
 import { createBackOff } from './back-off.ts';
 import { CHANNEL } from './channel.ts';
 import { confirmOffset } from './confirm-offset.ts';
 import { greet } from './greet.ts';
-import { createInbox } from './inbox.ts';
-import { createOutbox } from './outbox.ts';
+import { joinMail } from './join-mail.ts';
+import { openDoor, type DoorAddress } from './open-door.ts';
 import { USUAL_LIMITS, type Limits } from './pace.ts';
 import { openPlatform } from './platform.ts';
 import { poll } from './poll.ts';
 import { pruneNowAndThen } from './prune-now-and-then.ts';
 import { remind } from './remind.ts';
-import { sendPost } from './send-post.ts';
-import { makeTellTapSeen } from './tell-tap-seen.ts';
 
 /** Everything that serving Telegram needs, handed in. */
 export interface TelegramOptions {
@@ -33,6 +30,8 @@ export interface TelegramOptions {
   readonly log: Log;
   readonly clock: Clock;
   readonly config: { readonly botToken: string; readonly botApiRoot: string };
+  /** Where others reach us; without a webhook in it updates are polled. */
+  readonly door?: DoorAddress;
   /** Shows the operator a sentence. */
   readonly tell: (sentence: string) => void;
   /** Aborted when the program is asked to stop. */
@@ -62,10 +61,10 @@ const USUAL_TIMES: Times = {
 };
 
 /**
- * Serves private chats by long polling until the signal is aborted, then finishes what is in hand; what there is no time
- * for stays in the store.
+ * Serves private chats until the signal is aborted, then finishes what is in hand; what there is no time for stays in
+ * the store.
  *
- * @throws OperatorError when the platform does not accept the token.
+ * @throws OperatorError when the platform does not accept the token, or the port cannot be had.
  */
 export async function serveTelegram(options: TelegramOptions): Promise<void> {
   const { store, log, clock, config, tell, signal, limits = USUAL_LIMITS, reminding } = options;
@@ -73,20 +72,11 @@ export async function serveTelegram(options: TelegramOptions): Promise<void> {
   const { botToken: token, botApiRoot: root } = config;
   const platform = openPlatform({ token, root, ...times });
   const giveUp = new AbortController();
-  const untilGivenUp = { clock, log, store, signal: giveUp.signal };
-  const sending = { api: platform.sends, signal: giveUp.signal };
-  const outbox = createOutbox({ ...untilGivenUp, limits, send: (post) => sendPost(post, sending) });
-  const handling = makeHandling({
-    ...options,
-    ...untilGivenUp,
-    send: outbox.add,
-    sendNow: async (posts) => {
-      for (const post of posts) await sendPost(post, sending);
-    },
-    tellTapSeen: makeTellTapSeen({ api: platform.calls, log, signal: giveUp.signal }),
-  });
-  const inbox = createInbox({ ...untilGivenUp, handling });
+  const door = await openDoor({ ...options, platform });
+  const mail = joinMail({ ...options, platform, limits, meter: door.meter, signal: giveUp.signal });
+  const { inbox, outbox } = mail;
   const background: Promise<void>[] = [];
+  door.watch(mail);
   try {
     const backOff = createBackOff({ root, clock, log, tell, signal });
     if (!(await greet(platform, { backOff, log, tell, signal }))) return;
@@ -95,18 +85,19 @@ export async function serveTelegram(options: TelegramOptions): Promise<void> {
     await inbox.recover();
     if (reminding !== undefined)
       background.push(remind({ ...reminding, store, send: outbox.add, clock, log, signal }));
-    const { longPoll_s, watchdog_s } = times;
-    const polling = { api: platform.calls, inbox, backOff, clock, longPoll_s, watchdog_s, signal };
-    const offset = await poll(polling);
+    let offset = 0;
+    if (door.takeUpdates !== undefined) await door.takeUpdates({ backOff, signal });
+    else offset = await poll({ api: platform.calls, ...mail, backOff, clock, ...times, signal });
     const finished = Promise.all([inbox.idle(), ...background]).then(outbox.idle);
     await Promise.race([finished, clock.wait(1000 * times.finish_s, giveUp.signal)]);
     giveUp.abort();
     await Promise.all([inbox.idle(), outbox.idle()]);
-    const [left, unsent] = [inbox.state().count, outbox.state().count];
+    const [left, unsent] = [inbox.count(), outbox.count()];
     if (left + unsent > 0) log.warn({ left, unsent }, 'there was no time left for some messages');
     await confirmOffset(offset, { api: platform.calls, clock, log, within_s: times.confirm_s });
   } finally {
     giveUp.abort();
+    await door.close();
     platform.close();
   }
 }

@@ -29,6 +29,9 @@ export async function startTelegram(ground: Ground, botToken: string): Promise<v
     reminding: { serveDue: makeServeDue({ say, store, settings }), wakeUp },
     audit: makeAudit(tell),
     config: { ...config, botToken },
+    ...(config.port !== undefined && {
+      door: { port: config.port, ...(config.webhook !== undefined && { webhook: config.webhook }) },
+    }),
     log,
     clock,
     tell,

@@ -18,6 +18,7 @@ const PARAMS_OF: Readonly<Record<string, string>> = {
   getUpdates: 'GetUpdatesParams',
   sendMessage: 'SendMessageParams',
   answerCallbackQuery: 'AnswerCallbackQueryParams',
+  setWebhook: 'SetWebhookParams',
   deleteWebhook: 'DeleteWebhookParams',
 };
 

@@ -41,6 +41,8 @@ export class FakeBotApi implements AsyncDisposable {
   readonly delivered: Delivered[] = [];
   /** What the caller did that the platform's documentation forbids; to be empty at the end of a test. */
   readonly broken: string[] = [];
+  /** Where updates are to be brought, as the bot has asked. */
+  webhook: { readonly url: string; readonly secret_token: string } | undefined;
   /** Everything below this number has been confirmed. */
   confirmed = 0;
   root = '';
@@ -101,6 +103,11 @@ export class FakeBotApi implements AsyncDisposable {
     });
   }
 
+  /** Takes the updates that nobody has had yet, to be brought to a webhook. */
+  takeUpdates(): readonly object[] {
+    return this.#updates.splice(0);
+  }
+
   callsOf(method: string): readonly Params[] {
     return this.calls.filter((call) => call.method === method).map((call) => call.params);
   }
@@ -147,7 +154,10 @@ export class FakeBotApi implements AsyncDisposable {
       done({ id: 4455667788, is_bot: true, first_name: 'brimnote', username: 'a_cellar_bot' });
     else if (method === 'sendMessage') done(this.#deliver(params));
     else if (method === 'getUpdates') this.#poll(params, to, response);
-    else done(true);
+    else if (method === 'setWebhook') {
+      this.webhook = params as { url: string; secret_token: string };
+      done(true);
+    } else done(true);
   }
 
   #deliver(params: Params): object {

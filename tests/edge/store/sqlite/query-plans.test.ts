@@ -68,7 +68,10 @@ async function askAll(connection: DatabaseSync): Promise<void> {
     leaseDue(db, { ...due, cellar: 'cellar 1' }, 5),
   ]);
   await Promise.all([mailbox.waiting('c'), mailbox.countTry('c', [1]), mailbox.readdress('c', ['a'], '2')]);
-  await Promise.all([mailbox.settle('c', ['a']), mailbox.prune('c', { handled_at: 5, aside_at: 5, most: 5 })]);
+  await Promise.all([
+    mailbox.settle('c', ['a']),
+    mailbox.prune('c', { handled_at: 5, aside_at: 5, most: 5 }),
+  ]);
   await ledger.countedOf('tank 4', { from: place, before: place });
   await Promise.all([
     ledger.counted(place, 5),
