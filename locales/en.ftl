@@ -774,7 +774,11 @@ landed =
     }: of { $added } { $unit }, { $percent } % bound.
 landed-fell = { $vessel } went from { $before } to { $after } although { $added } { $unit } went in: all bound, or a slip. Measure again.
 landed-too-high = { $vessel } rose by { $rise } although only { $added } { $unit } went in. One figure is off: measure again.
-on-it = { $vessel }: { $who } is on it since { $when }.
+on-it =
+    { $vessel }: { $who ->
+        [you] you are
+       *[other] { $who } is
+    } on it since { $when }.
 claimed = { $vessel } is yours until { $until }. Others see it.
 claim-taken = { $vessel }: { $who } is on it since { $when }.
 ordered = Order { $entry }: { $vessel } { $list }.
@@ -1249,6 +1253,7 @@ picture-needed =
     }
 picture-limit = limit of total { $limit }
 picture-added = added
+picture-added-thinned = added (not every figure has room)
 picture-added-unknown = added, amount not known
 picture-blended = blended
 

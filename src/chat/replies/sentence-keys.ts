@@ -383,6 +383,7 @@ export interface SentenceValues {
   'person-unknown': 'list' | 'text';
   'person-which': 'list' | 'text';
   'picture-added': never;
+  'picture-added-thinned': never;
   'picture-added-unknown': never;
   'picture-addition': 'added' | 'day';
   'picture-additions': 'earlier' | 'list' | 'unit';

@@ -20,10 +20,13 @@ export function vesselName(vessel: string): string {
  * ```ts
  * vesselNames(['B1', 'B2', 'B3', 'B4']) // => "B1–B4"
  * vesselNames(['tank 4', 'tank 9']) // => "T4, T9"
+ * vesselNames(['barrel 12', 'barrel 13', 'barrel 14']) // => "barrel 12–14"
  * ```
  */
 export function vesselNames(vessels: readonly string[]): string {
   const names = vessels.map(vesselName);
   const [first, last] = [names[0] ?? '', names.at(-1) ?? ''];
-  return names.length > 2 ? `${first}–${last}` : names.join(', ');
+  if (names.length <= 2) return names.join(', ');
+  const word = /^\D+ (?=\d)/.exec(first)?.[0] ?? '';
+  return `${first}–${last.startsWith(word) ? last.slice(word.length) : last}`;
 }

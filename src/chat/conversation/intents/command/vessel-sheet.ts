@@ -11,7 +11,7 @@ import { checkSettingsOf } from '../../check-settings-of.ts';
 import type { Here } from '../../here.ts';
 import { line, listLine, part } from '../../lines/line.ts';
 import { notedAmount } from '../../lines/noted-amount.ts';
-import { nameText } from '../../people.ts';
+import { nameText, whoText } from '../../people.ts';
 import type { Handled } from '../../ports.ts';
 import { replying } from '../../replying.ts';
 import { tellingOf } from '../../telling.ts';
@@ -156,7 +156,7 @@ function claimLines({ vessel }: Vessel, here: Here): Line[] {
   if (claim === undefined) return [];
   const values = {
     vessel: vesselName(vessel),
-    who: nameText(claim.by, here),
+    who: whoText(claim.by, here),
     when: momentText(claim.at, tellingOf(here)),
   };
   return [line('first', 'on-it', values)];
