@@ -1,13 +1,16 @@
 import { parseArgs } from 'node:util';
 import { OperatorError } from './operator-error.ts';
 
-/** What `npm start` is told on the command line. */
-export interface StartOptions {
-  /** The chat is with an invented cellar, in this terminal. */
-  readonly demo: boolean;
-}
+/** What the program is to do: to serve, or to show an invented cellar, or to see to the cellar's file and end. */
+export type StartOptions =
+  | { readonly does: 'serve' | 'demo' }
+  | { readonly does: 'rebuild' }
+  | { readonly does: 'restore'; readonly copy: string };
 
-const USAGE = 'npm start, or npm start -- --demo for a cellar that is invented';
+const USAGE = `npm start                      serves: in this terminal, or on Telegram when BOT_TOKEN is set
+npm start -- --demo            a cellar that is invented, in this terminal
+npm run restore -- BACKUP      puts a backup in the place of the cellar's file
+npm run rebuild                derives the vessels anew from the log`;
 
 /**
  * Reads the command line.
@@ -15,11 +18,26 @@ const USAGE = 'npm start, or npm start -- --demo for a cellar that is invented';
  * @throws OperatorError with a sentence for what is no option
  */
 export function readStartOptions(args: readonly string[]): StartOptions {
+  const { demo, rebuild, restore } = parse(args);
+  if ([demo, rebuild, restore].filter((one) => one !== undefined).length > 1)
+    throw new OperatorError(`One at a time, please.\n${USAGE}`);
+  if (restore?.trim() === '') throw new OperatorError(`Which backup?\n${USAGE}`);
+  if (restore !== undefined) return { does: 'restore', copy: restore };
+  return { does: demo ? 'demo' : rebuild ? 'rebuild' : 'serve' };
+}
+
+function parse(args: readonly string[]) {
   try {
-    const { values } = parseArgs({ args: [...args], options: { demo: { type: 'boolean' } } });
-    return { demo: values.demo ?? false };
+    return parseArgs({
+      args: [...args],
+      options: {
+        demo: { type: 'boolean' },
+        rebuild: { type: 'boolean' },
+        restore: { type: 'string' },
+      },
+    }).values;
   } catch (cause) {
     const reason = cause instanceof Error ? cause.message.split('. ')[0] : String(cause);
-    throw new OperatorError(`${reason}. There is: ${USAGE}.`, { cause });
+    throw new OperatorError(`${reason}.\n${USAGE}`, { cause });
   }
 }

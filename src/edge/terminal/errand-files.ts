@@ -2,6 +2,7 @@ import { mkdir, readFile, stat, writeFile } from 'node:fs/promises';
 import { dirname, extname, join, relative, resolve } from 'node:path';
 import { FILE_LIMITS } from '../files/file-limits.ts';
 import type { ExportFile } from '../files/make-export.ts';
+import { momentInName } from '../upkeep/moment-in-name.ts';
 
 /** Reads a file that somebody named; undefined where there is none, and where it is larger than any that is taken. */
 export async function readNamedFile(name: string): Promise<Uint8Array | undefined> {
@@ -34,10 +35,9 @@ export async function writeExport(dataFile: string, { name, bytes }: ExportFile)
 
 /** Where a backup of the data goes: beside it, named by its moment (milliseconds since 1970). */
 export async function backupPathOf(dataFile: string, now: number): Promise<string> {
-  const moment = new Date(now).toISOString().slice(0, 19).replaceAll(/[:T]/g, '-');
   const folder = join(dirname(dataFile), 'backups');
   await mkdir(folder, { recursive: true });
-  return shownPath(join(folder, `cellar-${moment}.db`));
+  return shownPath(join(folder, `cellar-${momentInName(now)}.db`));
 }
 
 /** A path as it is said: from where the program runs, where it lies below. */

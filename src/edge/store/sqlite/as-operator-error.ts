@@ -21,7 +21,7 @@ const SENTENCES: Record<StoreFault, (path: string, reason: string) => string> = 
 /** What the operator is told of a file that is damaged. */
 export function damagedSentence(path: string, reason: string): string {
   const oneLine = reason.replaceAll(/\*\*\*[^*]*\*\*\*|\s+/g, ' ').trim();
-  return `${path} is damaged (${oneLine}). It is left as it is: move it away, with its -wal and -shm files, and put a backup in its place.`;
+  return `${path} is damaged (${oneLine}). It is left as it is. To put a backup in the place of the cellar's file: npm run restore -- BACKUP`;
 }
 
 /** The faults of `node:fs`. */

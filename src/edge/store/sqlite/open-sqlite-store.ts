@@ -1,5 +1,5 @@
-import { mkdirSync, realpathSync } from 'node:fs';
-import { basename, dirname, join } from 'node:path';
+import { mkdirSync } from 'node:fs';
+import { dirname } from 'node:path';
 import { DatabaseSync } from 'node:sqlite';
 import type { CellarStore } from '../../../core/cellar/cellar-store.ts';
 import { OperatorError } from '../../operator-error.ts';
@@ -8,6 +8,7 @@ import { checkAside } from './check-aside.ts';
 import { checkNotOrphaned, fileSize, findDamage } from './check-file.ts';
 import { createSqliteStore } from './create-sqlite-store.ts';
 import { migrate, readVersion } from './migrate.ts';
+import { realPath } from './real-path.ts';
 import { callSqlite } from './sqlite-fault.ts';
 import { lockForWriting } from './writer-lock.ts';
 
@@ -39,6 +40,7 @@ export async function openSqliteStore(path: string, options: SqliteStoreOptions)
       .reverse()
       .forEach((one) => one());
   try {
+    mkdirSync(dirname(path), { recursive: true });
     const file = realPath(path);
     toClose.push(lockForWriting(file));
     checkNotOrphaned(file);
@@ -65,17 +67,6 @@ export async function openSqliteStore(path: string, options: SqliteStoreOptions)
   } catch (error) {
     close();
     throw asOperatorError(error, path);
-  }
-}
-
-/** The place of the file itself, so that whoever comes by a link finds the same lock. */
-function realPath(path: string): string {
-  mkdirSync(dirname(path), { recursive: true });
-  try {
-    return realpathSync(path);
-  } catch (error) {
-    if ((error as NodeJS.ErrnoException).code !== 'ENOENT') throw error;
-    return join(realpathSync(dirname(path)), basename(path));
   }
 }
 

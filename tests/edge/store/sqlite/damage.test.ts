@@ -35,7 +35,7 @@ test.each<[string, (path: string) => void]>([
   const attempt = open(path);
   await expect(attempt).rejects.toBeInstanceOf(OperatorError);
   await expect(attempt).rejects.toThrow(
-    /cellar\.db is damaged \(.+\)\. It is left as it is: move it away.* put a backup/,
+    /cellar\.db is damaged \(.+\)\. It is left as it is.* npm run restore -- BACKUP/,
   );
   expect(readFileSync(path)).toEqual(before);
 });
