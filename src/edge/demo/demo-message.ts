@@ -1,3 +1,6 @@
+/** Stands for whoever sits at the keyboard. */
+export const AT_KEYBOARD = 'keyboard';
+
 /** A message of the invented cellar at a time of a day, so many days before the demo is started. */
 export interface DemoMessage {
   readonly back_days: number;

@@ -1,11 +1,11 @@
-import type { IncomingMessage } from '../../chat/conversation/ports.ts';
+import type { IncomingMessage, Who } from '../../chat/conversation/ports.ts';
 import { addDays } from '../../core/time/add-days.ts';
 import { MINUTE_ms } from '../../core/time/durations.ts';
 import { localTimeOf } from '../../core/time/local-time-of.ts';
 import type { ZonedMoment } from '../../core/time/local-time.ts';
 import { momentOf } from '../../core/time/moment-of.ts';
 import { AT_TERMINAL } from '../terminal/chat.ts';
-import type { DemoMessage } from './demo-message.ts';
+import { AT_KEYBOARD, type DemoMessage } from './demo-message.ts';
 import { LAST_HOUR } from './last-hour.ts';
 import { VINTAGE } from './vintage.ts';
 
@@ -16,16 +16,18 @@ export function demoMessages(now: ZonedMoment): readonly IncomingMessage[] {
     ...LAST_HOUR.map(({ by, text, back_min }) => ({ by, text, at: now.at - back_min * MINUTE_ms })),
   ];
   return told.map(({ by, text, at }, count) => ({
-    // In the cellar of the terminal, but in another chat: what falls due for these people is not said there.
-    cellar: AT_TERMINAL.cellar,
-    chat: `demo ${by}`,
-    person: `demo ${by}`,
-    name: by,
+    ...whoIs(by),
     id: `demo ${count}`,
     at,
     language: 'en',
     content: { kind: 'text', text },
   }));
+}
+
+/** In the cellar of the terminal, but in a chat of their own: what falls due for these people is not said there. */
+function whoIs(by: string): Who {
+  if (by === AT_KEYBOARD) return AT_TERMINAL;
+  return { cellar: AT_TERMINAL.cellar, chat: `demo ${by}`, person: `demo ${by}`, name: by };
 }
 
 function momentBefore(

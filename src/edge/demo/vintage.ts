@@ -1,4 +1,4 @@
-import type { DemoMessage } from './demo-message.ts';
+import { AT_KEYBOARD, type DemoMessage } from './demo-message.ts';
 
 /** Who works in the invented cellar: a winemaker, and two who carry and measure. */
 const [INES, TOMAS, NORA] = ['Ines', 'Tomas', 'Nora'] as const;
@@ -11,8 +11,9 @@ type Row = readonly [
 ];
 
 const ROWS: readonly Row[] = [
+  // The first to write is the keeper: whoever tries the demo may change everything.
+  [96, '7:35', AT_KEYBOARD, 'our usual is kmbs'],
   // Harvest: the whites come in, are sulphited as musts, and ferment.
-  [96, '7:35', INES, 'our usual is kmbs'],
   [96, '7:40', NORA, 'T1 now 6400 L white must pH 3.28 free 0'],
   [96, '7:55', NORA, 'added 330 g kmbs T1 lot 4471'],
   [96, '8:05', INES, 'T1 = Blanca'],
