@@ -475,7 +475,7 @@ chat-help-solution = make 5 L of 10% kmbs
 chat-help-solution-means = → how to make a stock
 chat-help-fields = Any order; also total, red, 13.5%, target 35, +25 ppm, +30%, smbs. Tanks: a line each.
 chat-help-care = The label, your local rules and a qualified person come first.
-not-served = I cannot do that yet. Send a reading, like: T4 1450 gal pH 3.58 free 21
+send-alone = That goes in a message of its own.
 unreadable =
     { $what ->
         [edited] I do not read changed messages. Please send it anew.
@@ -1062,7 +1062,7 @@ not-allowed =
     }
 guest-not-kept = You are a guest here: nothing of this is noted.
 not-of-cellar = You are not of this cellar any more. A keeper of it can invite you: then send me the code.
-invite-how = With which role? Write: invite hand, invite guest or invite keeper
+invite-how = With which role? Write: invite hand, or: invite guest, or: invite keeper
 invite-not-here = I can make no code here.
 invited = Code for one { role }, until { $day }: { $code }
 invited-how =

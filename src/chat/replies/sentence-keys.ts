@@ -338,7 +338,6 @@ export interface SentenceValues {
   'no-such-choice': 'last' | 'text';
   'not-allowed': 'keepers' | 'list' | 'role';
   'not-of-cellar': never;
-  'not-served': never;
   'note-each-or-total': 'text';
   'note-free-unlabelled': 'text';
   'note-mass-beside-readings': 'text';
@@ -476,6 +475,7 @@ export interface SentenceValues {
   'round-volume-which': 'said' | 'vessel';
   'safety-head': 'additive';
   'salt-name': 'named';
+  'send-alone': never;
   'set-aside': 'list';
   'set-aside-figure': 'text';
   'setting-allowance': 'percent';

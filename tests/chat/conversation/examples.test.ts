@@ -10,6 +10,13 @@ const BEFORE = /(?:\blike:|\bwrite(?: it whole| one of them)?:|with its unit:|I 
 /** Sentences of other texts that hold what looks like an example, and why it is none to send. */
 const NONE: Readonly<Record<string, string>> = {
   'terminal-start': 'its example stands in the line below',
+  'demo-start-reading': 'the demo is tried by itself',
+  'undo-late': 'it takes a quarter of an hour: a dialogue has it',
+  'undo-not-yours': 'it takes two people: a dialogue has it',
+  'last-keeper': 'it takes two people: a dialogue has it',
+  'person-which': 'it takes two people: a dialogue has it',
+  'joined-how': 'it takes two people: a dialogue has it',
+  'import-problem': 'it takes a file: the tests of files have it',
 };
 
 /** Each sentence with examples, and the messages after which a person reads it. */
@@ -58,7 +65,21 @@ const SCENES: readonly (readonly [key: string, ...messages: string[]])[] = [
   ['problem-not-understood', 'asdf qwer zxcv'],
   ['chat-greeting', 'hi'],
   ['chat-other', 'who left the pump on'],
-  ['not-served', 'T4?'],
+  ['vessel-unknown', 'T9?'],
+  ['ask-zone', 'added 20 g kmbs T4'],
+  ['order-how', 'order T4'],
+  ['strike-why', 'added 20 g kmbs T4', 'strike 1'],
+  ['history-empty', 'history'],
+  ['vessels-none', 'vessels'],
+  ['setting-wrong', 'target 5 for reds'],
+  ['setting-wrong', 'quiet 25 to 6'],
+  ['setting-wrong', 'time zone Moonbase'],
+  ['setting-wrong', 'allowance 200%'],
+  ['setting-wrong', 'our usual is kmbs 12%'],
+  ['setting-wrong', 'daily list at 27:00'],
+  ['invite-how', 'invite'],
+  ['added-it-none', 'added it'],
+  ['picture-none', 'picture'],
 ];
 
 /** Doubts that only the whole line settles: each way to write the figure, in a whole line. */

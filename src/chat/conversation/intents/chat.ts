@@ -19,7 +19,7 @@ const HELP = [
 /** The sentences for a matter of the chat; the readers of other words get how to begin. */
 function keysFor(reading: Reading): readonly SentenceKey[] {
   if (noteText(reading, 'negated') !== undefined) return ['chat-negated'];
-  if (reading.intent !== 'chat') return ['not-served'];
+  if (reading.intent !== 'chat') return ['send-alone'];
   if (reading.topic === 'help') return HELP;
   if (reading.topic === 'greeting') return ['chat-greeting'];
   return reading.topic === 'thanks' ? ['chat-thanks'] : ['chat-other'];

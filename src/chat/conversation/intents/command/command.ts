@@ -96,6 +96,6 @@ export async function answerCommand(
     case 'lot':
       return undefined;
     case undefined:
-      return replying(here, { lines: [line('first', 'not-served')] });
+      return replying(here, { lines: [line('first', 'send-alone')] });
   }
 }
