@@ -1,4 +1,5 @@
 import type { CellarStore, TakenDue, Write } from '../core/cellar/cellar-store.ts';
+import type { Door } from './cellars/door.ts';
 import { handleDue } from '../chat/conversation/handle-due.ts';
 import type { Settings } from '../chat/conversation/settings.ts';
 import type { Said, Say } from '../chat/replies/say.ts';
@@ -8,6 +9,8 @@ export interface ServingDue {
   readonly say: Say;
   readonly store: Pick<CellarStore, 'turn'>;
   readonly settings: Settings;
+  /** Knows what a chat is called by now, and its cellars; absent where the edge itself does. */
+  readonly door?: Pick<Door, 'whereIs'>;
 }
 
 /** What is to be sent to a chat unasked. */
@@ -27,14 +30,18 @@ export type ServeDue = (
 ) => Promise<Unasked>;
 
 /** Makes the serving of due things. */
-export function makeServeDue({ say, store, settings }: ServingDue): ServeDue {
-  return (due, now, also) =>
-    store.turn(due.cellar, async (view) => {
-      const { chat, cellar } = due;
+export function makeServeDue({ say, store, settings, door }: ServingDue): ServeDue {
+  return async (due, now, also) => {
+    const place = await door?.whereIs(due.chat);
+    const chat = place?.chat ?? due.chat;
+    const { cellar } = due;
+    const where = { ...place, ...(place && cellar !== chat && { isJoined: true as const }) };
+    return store.turn(cellar, async (view) => {
       // Its hour may have been changed since it was handed out.
       if ((await view.due(due.id)) === undefined) return { writes: [], result: { chat, said: [] } };
-      const { writes, replies } = await handleDue({ cellar, due, at: now }, view, settings);
+      const { writes, replies } = await handleDue({ cellar, due, at: now, ...where }, view, settings);
       const result: Unasked = { chat, said: replies.map(say) };
       return { writes: also === undefined ? writes : [...writes, ...also(result)], result };
     });
+  };
 }

@@ -3,6 +3,7 @@ import { faultReply } from '../chat/conversation/fault-reply.ts';
 import type { Errand, Handle, Handled, IncomingMessage } from '../chat/conversation/ports.ts';
 import type { Settings } from '../chat/conversation/settings.ts';
 import type { Said, Say } from '../chat/replies/say.ts';
+import type { Door } from './cellars/door.ts';
 import { StoreError } from './store/store-error.ts';
 
 /** What serving a message needs: the conversation, its words, and the store. */
@@ -12,6 +13,8 @@ export interface Serving {
   readonly store: Pick<CellarStore, 'turn'>;
   /** What holds where a cellar has set nothing. */
   readonly settings: Settings;
+  /** Finds the cellar of a message; absent where the edge itself knows it. */
+  readonly door?: Door;
   /** Tells whoever runs the program of a fault of ours, or of the world's. */
   readonly report: (fault: unknown) => void;
 }
@@ -23,6 +26,8 @@ export interface Served {
   readonly understood?: Handled['understood'];
   /** Something with files that is still to be done. */
   readonly errand?: Errand;
+  /** The message with the cellar that it was handled in: an errand is for that one. */
+  readonly message?: IncomingMessage;
 }
 
 /** Serves a message: handled in a turn of its cellar, and answered only once what it wrote is durable. Never rejects. */
@@ -37,20 +42,38 @@ export type ServeTurn = (
   also?: (served: Served) => readonly Write[],
 ) => Promise<Served>;
 
+/** So often a message is handled at most until it could be read. */
+const MOST_PASSES = 3;
+
 /** Makes the serving of messages for whoever tries again by themselves. */
-export function makeServeTurn({ handle, say, store, settings }: Omit<Serving, 'report'>): ServeTurn {
-  return (message, also) =>
-    store.turn(message.cellar, async (view) => {
-      const { writes, replies, answers, understood, errand } = await handle(message, view, settings);
-      // Said inside the turn: what cannot be said is not kept either.
-      const result: Served = {
-        said: replies.map(say),
-        ...(answers && { answers }),
-        ...(understood && { understood }),
-        ...(errand && { errand }),
-      };
-      return { writes: also === undefined ? writes : [...writes, ...also(result)], result };
-    });
+export function makeServeTurn(serving: Omit<Serving, 'report'>): ServeTurn {
+  const { say, store, settings, door } = serving;
+  return async (incoming, also) => {
+    const admitted = await door?.admit(incoming);
+    const { message, handle } = admitted ?? { message: incoming, handle: serving.handle };
+    for (let pass = 1; pass <= MOST_PASSES; pass += 1) {
+      const served = await store.turn(message.cellar, async (view) => {
+        const { writes, replies, answers, understood, errand, place, again } = await handle(
+          message,
+          view,
+          settings,
+        );
+        if (again) return { writes, result: undefined };
+        // The chat is moved first: should nothing else be kept, the same message moves it there again.
+        if (place) await door?.move(message.chat, place);
+        // Said inside the turn: what cannot be said is not kept either.
+        const result: Served = {
+          said: replies.map(say),
+          ...(answers && { answers }),
+          ...(understood && { understood }),
+          ...(errand && { errand, message }),
+        };
+        return { writes: also === undefined ? writes : [...writes, ...also(result)], result };
+      });
+      if (served !== undefined) return served;
+    }
+    throw new RangeError('a message was to be handled again and again');
+  };
 }
 
 /** Makes the serving of messages. */

@@ -5,6 +5,10 @@ import { DEFAULT_SETTINGS, type Settings } from '../../src/chat/conversation/set
 import { makeSay, type Said } from '../../src/chat/replies/say.ts';
 import { loadLocales } from '../../src/edge/locales.ts';
 import { isLanguage } from '../../src/edge/languages.ts';
+import type { AllowRule } from '../../src/edge/cellars/allow-rule.ts';
+import { makeDoor, type Door } from '../../src/edge/cellars/door.ts';
+import { createRateLimit } from '../../src/edge/cellars/rate-limit.ts';
+import { createRegistry } from '../../src/edge/cellars/registry.ts';
 import { makeServeDue } from '../../src/edge/serve-due.ts';
 import { makeServe, type Serve } from '../../src/edge/serve-message.ts';
 import { createMemoryCellars } from '../../src/edge/store/memory-cellars.ts';
@@ -12,6 +16,8 @@ import { createMemoryCellars } from '../../src/edge/store/memory-cellars.ts';
 const MOVES = [
   'them',
   'press',
+  'overhears',
+  'edits',
   'sends',
   'later',
   'language',
@@ -19,6 +25,10 @@ const MOVES = [
   'name',
   'chat',
   'cellar',
+  'alone',
+  'group',
+  'moves',
+  'allows',
   'tick',
   'restart',
 ] as const;
@@ -42,10 +52,13 @@ const LINE = new RegExp(`^(${MOVES.join('|')}|us):(?: (.*))?$`);
  * Reads a scene. `them:` is what a person writes (lines that follow each other are one message), `us:` what we answer,
  * `press:` a button by its label, `sends:` what cannot be read. `later:` lets minutes pass (`3 h` hours, `2 d` days),
  * `person:` or `name:` and `language:` say who is there from now on, `chat:` in which chat, and `cellar:` in which cellar, where
- * nothing is known yet. `tick:` is the
- * moment at which what is due is said, `restart:` begins the program anew with the same store. In an answer `…` stands
- * for any lines, and a line in square brackets for the buttons; a line in round brackets names another chat than the
- * present one, in which what follows is said.
+ * nothing is known yet. From `alone:` or `group:` on, which name a chat, the bot finds its cellar by itself; in a group it is
+ * called, and in `overhears:` it is not. `{code}` in what a person writes is the last code of an invitation that was shown.
+ * `moves:` gives the group another name, `allows:` says who may use the bot (`open`, or people). `edits:` changes the text
+ * of the person's last message. `tick:` is the moment at which what is due is said, `restart:` begins the program anew
+ * with the same store. In an answer `…` stands for any lines, `(code)` for the code of an invitation, `(in place)` for an
+ * answer that takes the place of an earlier one, and a line in square brackets for the buttons; a line in round brackets
+ * else names another chat than the present one, in which what follows is said.
  */
 export function readScene(text: string): Scene {
   const [first = '', ...rest] = text.split('\n');
@@ -119,11 +132,19 @@ export async function play(
 ): Promise<string[][]> {
   let at = START;
   const store = createMemoryCellars({ now: () => at });
+  const registry = createRegistry(store);
+  const paceOf = createRateLimit();
+  let rule: AllowRule = { is: 'open' };
+  let door: Door | undefined;
   let serve = serving(store, settings);
   let language: IncomingMessage['language'] = 'en';
   let person = 'Ana';
   let chat = 'one';
   let cellar = 'harbour cellar';
+  let addressed: 'direct' | 'called' = 'direct';
+  let code = '';
+  /** What each person wrote last in a chat. */
+  const written = new Map<string, { readonly original: string; readonly original_at: number }>();
   /** What stands on the screen of each chat. */
   const shown = new Map<string, readonly Said[]>();
   const show = (where: string, said: readonly Said[]): void => {
@@ -137,20 +158,46 @@ export async function play(
     if (does === 'person' || does === 'name') person = what;
     if (does === 'chat') chat = what;
     if (does === 'cellar') cellar = what;
-    if (does === 'restart') serve = serving(store, settings);
+    if (does === 'alone' || does === 'group') {
+      chat = what;
+      cellar = what;
+      addressed = does === 'group' ? 'called' : 'direct';
+    }
+    if (does === 'moves') {
+      await registry.migrateChat(chat, what);
+      chat = what;
+    }
+    if (does === 'allows') rule = what === 'open' ? { is: 'open' } : { is: 'invited', ids: what.split(', ') };
+    if (['alone', 'group', 'allows'].includes(does))
+      door = makeDoor({ store, registry, rule, paceOf, handle });
+    serve = serving(store, settings, door);
     if (does === 'tick') {
       const sent = await tick(store, at);
       for (const one of sent) show(one.chat, [one.said]);
       answers.push(unaskedLines(sent, chat));
       continue;
     }
-    const content = contentOf(does, what, shown.get(chat) ?? []);
+    const mine = JSON.stringify([chat, person]);
+    const content = contentOf(does, what.replace('{code}', code), {
+      shown: shown.get(chat) ?? [],
+      ...written.get(mine),
+    });
     if (content === undefined) {
       answers.push([]);
       continue;
     }
     const who = { cellar, chat, person, name: person };
-    const { said } = await serve({ ...who, id: String(count), at, language, content });
+    const { said } = await serve({
+      ...who,
+      id: String(count),
+      at,
+      language,
+      content,
+      addressed: does === 'overhears' ? 'overheard' : addressed,
+      nonce: String(count).padStart(24, '0'),
+    });
+    if (content.kind === 'text') written.set(mine, { original: String(count), original_at: at });
+    code = said.flatMap(({ text }) => CODE.exec(text)?.[0] ?? []).at(-1) ?? code;
     show(chat, said);
     answers.push(said.flatMap(linesOf));
   }
@@ -158,11 +205,11 @@ export async function play(
 }
 
 /** Begins the program: nothing but the store is left from before. A fault of ours ends the scene. */
-function serving(store: CellarStore, settings: Settings): Serve {
+function serving(store: CellarStore, settings: Settings, door?: Door): Serve {
   const report = (fault: unknown): never => {
     throw fault;
   };
-  return makeServe({ handle, say, store, settings, report });
+  return makeServe({ handle, say, store, settings, report, ...(door && { door }) });
 }
 
 function unaskedLines(sent: readonly SaidUnasked[], present: string): string[] {
@@ -174,8 +221,21 @@ function unaskedLines(sent: readonly SaidUnasked[], present: string): string[] {
   });
 }
 
-function contentOf(does: Move['does'], what: string, shown: readonly Said[]): Content | undefined {
-  if (does === 'them') return { kind: 'text', text: what };
+/** What a person sees, and wrote last. */
+interface Screen {
+  readonly shown: readonly Said[];
+  readonly original?: string;
+  readonly original_at?: number;
+}
+
+function contentOf(
+  does: Move['does'],
+  what: string,
+  { shown, original, original_at = 0 }: Screen,
+): Content | undefined {
+  if (does === 'edits' && original !== undefined)
+    return { kind: 'edited', text: what, original, original_at };
+  if (does === 'them' || does === 'overhears') return { kind: 'text', text: what };
   if (does === 'sends') return { kind: 'unreadable', what: what as 'photo' };
   if (does !== 'press') return undefined;
   const button = shown
@@ -184,10 +244,18 @@ function contentOf(does: Move['does'], what: string, shown: readonly Said[]): Co
   return { kind: 'press', key: button?.key ?? what };
 }
 
-function linesOf({ text, buttons }: Said): string[] {
+/** The codes of a scene: the cellar, and the place of the message in the scene. */
+const CODE = /\w+-\d{24}/;
+
+function linesOf({ text: said, buttons, replaces }: Said): string[] {
+  const text = said.replace(CODE, '(code)');
   const row = buttons.map(({ mark, label }) => `${mark} ${label}`).join(' | ');
   // Thin spaces cannot be told from others in a scene's file.
-  return [...text.replaceAll('\u202f', ' ').split('\n'), ...(row === '' ? [] : [`[${row}]`])];
+  return [
+    ...(replaces === undefined ? [] : ['(in place)']),
+    ...text.replaceAll('\u202f', ' ').split('\n'),
+    ...(row === '' ? [] : [`[${row}]`]),
+  ];
 }
 
 /** Whether an answer is as the scene has it, `…` standing for any lines. */

@@ -3,6 +3,7 @@ import { dueVessels } from '../../core/cellar/due-vessels.ts';
 import { dailyTurn } from '../../core/time/daily-turn.ts';
 import { dayBounds } from '../../core/time/day-bounds.ts';
 import { localTimeOf } from '../../core/time/local-time-of.ts';
+import { namingCellar } from './cellar/naming-cellar.ts';
 import { checkSettingsOf } from './check-settings-of.ts';
 import { dailyDue, dailyHoursOf, type DueAbout } from './daily.ts';
 import { arrive, withVessels, type Here } from './here.ts';
@@ -10,7 +11,7 @@ import { dueLines } from './intents/command/lists.ts';
 import { dailyKey } from './keys.ts';
 import { entryPart } from './lines/entry-part.ts';
 import { line } from './lines/line.ts';
-import type { Handled } from './ports.ts';
+import type { CellarPlace, Handled } from './ports.ts';
 import type { Settings } from './settings.ts';
 import { zoneOf } from './zone.ts';
 
@@ -20,6 +21,12 @@ export interface DueNow {
   readonly due: Due;
   /** In milliseconds since 1970. */
   readonly at: number;
+  /** The name that the chat goes by now, where it has got another. */
+  readonly chat?: string;
+  /** All cellars of the chat, where there are several. */
+  readonly cellars?: readonly CellarPlace[];
+  /** Whether the chat is in the cellar by an invitation; nothing is said where that holds no more. */
+  readonly isJoined?: true;
 }
 
 /**
@@ -27,14 +34,15 @@ export interface DueNow {
  * with a message, the writes and the replies are returned as data.
  */
 export async function handleDue(
-  { cellar, due, at }: DueNow,
+  { cellar, due, at, chat = due.chat, cellars, isJoined }: DueNow,
   view: CellarView,
   defaults: Settings,
 ): Promise<Handled> {
   const about = JSON.parse(due.about) as DueAbout;
   const message = {
     cellar,
-    chat: due.chat,
+    chat,
+    ...(cellars && { cellars }),
     person: '',
     id: due.id,
     at,
@@ -42,7 +50,11 @@ export async function handleDue(
     content: { kind: 'text', text: '' },
   } as const;
   const here = await arrive(message, view, defaults);
-  return about.kind === 'daily' ? sayDaily(due, about, here, view) : sayReminder(due, about, here, view);
+  const isShutOut = isJoined === true && here.roster.chats[chat] === undefined;
+  if (isShutOut) return { writes: [{ kind: 'said', id: due.id }], replies: [] };
+  const said =
+    about.kind === 'daily' ? sayDaily(due, about, here, view) : sayReminder(due, about, here, view);
+  return namingCellar(await said, message);
 }
 
 /** One message a day lists what is to be measured, today included; nothing is said where nothing is. */
@@ -56,17 +68,23 @@ async function sayDaily(
   const said: Write = { kind: 'said', id: due.id };
   const hours = dailyHoursOf(settings);
   if (hours === undefined) return { writes: [said, { kind: 'drop', key: dailyKey(due.chat) }], replies: [] };
-  const { at } = message;
+  const { at, chat } = message;
+  // A chat that has got another name may have its list by that already.
+  const isMoved = chat !== due.chat;
+  const old: Write[] = isMoved ? [{ kind: 'drop', key: dailyKey(due.chat) }] : [];
+  if (isMoved && (await view.kept(dailyKey(chat))) !== undefined)
+    return { writes: [said, ...old], replies: [] };
   const turn = dailyTurn(at, { ...hours, ...(about.said_at !== undefined && { said_at: about.said_at }) });
   const next = dailyDue(
-    due.chat,
+    chat,
     { at: turn.next, set_at: at },
     { ...about, ...(turn.is === 'now' && { said_at: at }) },
   );
   const writes: Write[] = [
     said,
+    ...old,
     { kind: 'due', due: next },
-    { kind: 'keep', key: dailyKey(due.chat), text: next.id },
+    { kind: 'keep', key: dailyKey(chat), text: next.id },
   ];
   if (turn.is === 'later') return { writes, replies: [] };
   const { to } = dayBounds(localTimeOf(at, zoneOf(settings)), zoneOf(settings));

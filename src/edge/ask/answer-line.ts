@@ -38,6 +38,7 @@ export function makeAnswerLine(options: LineOptions): (line: string) => Promise<
       id: id === null ? `${options.run} ${count}` : String(id),
       at,
       language: input.language ?? options.language,
+      trusted: true,
       content:
         input.press === undefined
           ? { kind: 'text', text: input.text ?? '' }

@@ -106,7 +106,15 @@ async function answerIn(
     const { store: kept, ...place } = placeOf(undefined);
     const faults: unknown[] = [];
     const serve = makeServe({ handle, say, store: kept, settings, report: (fault) => faults.push(fault) });
-    const message = { ...place, person: 'someone', id: run, at: clock.at, language, content };
+    const message = {
+      ...place,
+      person: 'someone',
+      id: run,
+      at: clock.at,
+      language,
+      content,
+      trusted: true,
+    } as const;
     const { said } = await serve(message);
     output.write(`${said.map((one) => one.text).join('\n\n')}\n`);
     for (const fault of faults) tell(faultText(fault));

@@ -3,6 +3,7 @@ import type { Language } from '../../chat/reader/understood.ts';
 import type { Said, Say } from '../../chat/replies/say.ts';
 import type { Audit } from '../audit-workings.ts';
 import type { Serve } from '../serve-message.ts';
+import { newNonce } from '../cellars/new-nonce.ts';
 import { batchLines } from './batch-lines.ts';
 
 /** Everything that a chat on a keyboard needs, handed in. */
@@ -68,7 +69,15 @@ async function answer(text: string, id: string, options: TerminalOptions): Promi
   const { serve, now, language, name, audit, runErrand } = options;
   const content = { kind: 'text', text } as const;
   const who = { ...AT_TERMINAL, ...(name !== undefined && { name }) };
-  const message: IncomingMessage = { ...who, id, at: now(), language, content };
+  const message: IncomingMessage = {
+    ...who,
+    id,
+    at: now(),
+    language,
+    content,
+    trusted: true,
+    nonce: newNonce(),
+  };
   const { said, answers, errand } = await serve(message);
   audit?.(answers);
   if (errand === undefined || runErrand === undefined) return said;

@@ -14,7 +14,8 @@ export function asGuestSees(handled: Handled): Handled {
 /** What a conversation needs to go on. */
 function isOfTheirOwn(write: Write): boolean {
   return (
-    write.kind !== 'entry' && !((write.kind === 'keep' || write.kind === 'drop') && /^plan /.test(write.key))
+    write.kind !== 'entry' &&
+    !((write.kind === 'keep' || write.kind === 'drop') && write.key.startsWith('plan '))
   );
 }
 

@@ -8,6 +8,7 @@ import { cellarPart, placeOf } from './cellar-name.ts';
 import { readCode } from './code.ts';
 import type { Invitation } from './invitation.ts';
 import { keepingRoster } from './keeping-roster.ts';
+import { refused } from './refused.ts';
 import { higherRole, type Role, type Roster } from './roster.ts';
 
 /**
@@ -19,6 +20,9 @@ export async function join(code: string, here: Here, view: CellarView): Promise<
   const { chat, person, cellar } = message;
   const read = readCode(code);
   const key = inviteKey(read?.secret ?? '');
+  // The edge takes a group nowhere else but for its keepers.
+  const isGroup = (message.addressed ?? 'direct') !== 'direct';
+  if (read?.cellar !== cellar && isGroup && here.role !== 'keeper') return refused('keeper', here, view);
   const kept = read?.cellar === cellar ? await view.kept(key) : undefined;
   if (kept === undefined) return turnedAway('join-unknown', here);
   const invitation = JSON.parse(kept) as Invitation;
@@ -31,9 +35,11 @@ export async function join(code: string, here: Here, view: CellarView): Promise<
   }
   const role = higherRole(roleBefore(here), invitation.role);
   if (role === here.role) return { ...(await welcome('joined-before', role, here, view)), place };
+  const isPrivate = message.isJoined && !isGroup;
   const next: Roster = {
     ...roster,
     roles: { ...roster.roles, [me]: role },
+    owners: isPrivate ? { ...roster.owners, [chat]: me } : roster.owners,
     chats: message.isJoined
       ? { ...roster.chats, [chat]: higherRole(roster.chats[chat], invitation.role) }
       : roster.chats,

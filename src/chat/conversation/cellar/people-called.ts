@@ -3,14 +3,11 @@ import { fold } from './fold-name.ts';
 
 /**
  * The people that a name can mean: by their whole name, else by its first word, or by their number.
- *
- * @param me the number of the person who says it
  */
-export function peopleCalled(who: string, people: readonly Person[], me: number): readonly Person[] {
+export function peopleCalled(who: string, people: readonly Person[]): readonly Person[] {
   const said = fold(who);
   const [, number] = /^person (\d{1,6})$/.exec(said) ?? [];
   if (number !== undefined) return people.filter((one) => one.number === Number(number));
-  if (said === 'me') return people.filter((one) => one.number === me);
   const whole = people.filter(({ name }) => name !== undefined && fold(name) === said);
   if (whole.length > 0) return whole;
   return people.filter(({ name }) => name !== undefined && fold(name).split(' ')[0] === said);

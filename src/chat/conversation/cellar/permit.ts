@@ -3,12 +3,9 @@ import type { Command } from '../../reader/command.ts';
 import type { Intent } from '../../reader/understood.ts';
 import type { Here } from '../here.ts';
 import { ROSTER_KEY, SETTINGS_KEY } from '../keys.ts';
-import { line, part } from '../lines/line.ts';
-import { nameText } from '../people.ts';
 import type { Handled } from '../ports.ts';
-import { replying } from '../replying.ts';
 import { asGuestSees } from './as-guest-sees.ts';
-import { keepersOf } from './role-of.ts';
+import { refused } from './refused.ts';
 import { ROLES, type Role } from './roster.ts';
 
 /** The words that are a keeper's, whatever comes of them. */
@@ -52,6 +49,8 @@ async function roleNeeded(handled: Handled, here: Here, view: CellarView): Promi
   const { writes, errand, place, understood } = handled;
   const name = understood?.readings[0]?.command?.name;
   if (name !== undefined && KEEPERS_WORDS.has(name)) return 'keeper';
+  // Whoever wants to be forgotten is.
+  if (name === 'forget-me') return 'guest';
   if (errand?.kind === 'import' || errand?.kind === 'backup') return 'keeper';
   // In a group another cellar is another one for all who are there.
   const isGroup = (here.message.addressed ?? 'direct') !== 'direct';
@@ -93,14 +92,4 @@ function isOnlyReckoned({ understood, writes, errand }: Handled): boolean {
     const { entry } = write;
     return entry.kind === 'reading' || (entry.kind === 'vessel' && entry.event === 'told');
   });
-}
-
-async function refused(needed: Role, here: Here, view: CellarView): Promise<Handled> {
-  const people = await view.people();
-  const byNumber = new Map(people.map((person) => [person.number, person]));
-  const list = keepersOf(here.roster, people).map(({ number }) =>
-    part('keeper-called', { name: nameText(number, { people: byNumber }) }),
-  );
-  const values = { role: needed, keepers: list.length === 0 ? 'none' : 'some' };
-  return replying(here, { lines: [{ ...line('first', 'not-allowed', values), list }], keepsButtons: true });
 }

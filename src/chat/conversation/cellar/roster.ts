@@ -14,6 +14,8 @@ export interface Roster {
   readonly roles: Readonly<Record<string, Role | 'none'>>;
   /** The chats that joined by an invitation, and what those have in them who have no role of their own. */
   readonly chats: Readonly<Record<string, Role>>;
+  /** Whose private chat is which of those, by the number of the person. */
+  readonly owners: Readonly<Record<string, number>>;
   /** The number of the person who is keeper without having been made one. */
   readonly firstKeeper: number;
   /** Whether readings are answered in a group that were not said to the bot. */
@@ -21,7 +23,7 @@ export interface Roster {
 }
 
 /** Nothing was told yet: the first person is keeper. */
-const FRESH_ROSTER: Roster = { roles: {}, chats: {}, firstKeeper: 1 };
+const FRESH_ROSTER: Roster = { roles: {}, chats: {}, owners: {}, firstKeeper: 1 };
 
 /** The roster out of what is kept; undefined where nothing was told. */
 export function readRoster(kept: string | undefined): Roster {

@@ -4,6 +4,7 @@ import type { Line } from '../../../replies/reply.ts';
 import { keepingRoster } from '../../cellar/keeping-roster.ts';
 import { peopleCalled } from '../../cellar/people-called.ts';
 import { keepersOf, rolesOf } from '../../cellar/role-of.ts';
+import type { Roster } from '../../cellar/roster.ts';
 import type { Here } from '../../here.ts';
 import { line, part } from '../../lines/line.ts';
 import { nameText } from '../../people.ts';
@@ -54,7 +55,7 @@ export async function changeRole(
   const known = rolesOf(roster, people);
   // Somebody who was removed can be given a role again.
   const among = to === 'none' ? known.map(({ person }) => person) : people;
-  const found = peopleCalled(who, among, here.me);
+  const found = peopleCalled(who, among);
   const [person, another] = found;
   if (person === undefined)
     return unknown(
@@ -72,7 +73,18 @@ export async function changeRole(
   if (role === to) return replying(here, { lines: [line('first', 'role-same', values)] });
   const { writes, ...said } = replying(here, { lines: [line('first', 'role-changed', values)] });
   const roles = { ...roster.roles, [person.number]: to };
-  return { ...said, writes: [keepingRoster({ ...roster, roles }), ...writes] };
+  const next = to === 'none' ? withoutChatsOf(person.number, roster) : roster;
+  return { ...said, writes: [keepingRoster({ ...next, roles }), ...writes] };
+}
+
+/** Nothing comes into the private chat of somebody who was removed. */
+function withoutChatsOf(person: number, roster: Roster): Roster {
+  const others = ([chat]: readonly [string, unknown]): boolean => roster.owners[chat] !== person;
+  return {
+    ...roster,
+    chats: Object.fromEntries(Object.entries(roster.chats).filter(others)),
+    owners: Object.fromEntries(Object.entries(roster.owners).filter(others)),
+  };
 }
 
 /** Without a capital it may be no name at all: then it was talk. */
