@@ -29,6 +29,8 @@ export function createChatQueues<T extends Queued>(
 
   const run = async (chatId: number, queue: T[]): Promise<void> => {
     running += 1;
+    // All that came with it is seen together.
+    await Promise.resolve();
     while (queue.length > 0) {
       const done = await handle(queue as [T, ...T[]]);
       if (done === 0) break;
