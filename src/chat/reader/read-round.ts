@@ -1,5 +1,6 @@
 import type { Board } from './board.ts';
 import { isFree, placeOf } from './board.ts';
+import type { Command } from './command.ts';
 import { finishReading } from './finish-reading.ts';
 import { readDraft } from './read-draft.ts';
 import type { Term } from './split-terms.ts';
@@ -46,9 +47,27 @@ function headingOf({ when, command }: Draft, board: Board): Heading {
   };
 }
 
+/** Words that mean something only as a whole message: `done` above a round says that all of it went in. */
+const ALONE: ReadonlySet<Command['name']> = new Set<Command['name']>([
+  'added-it',
+  'picture',
+  'invite',
+  'join',
+  'people',
+  'remove-person',
+  'make-person',
+  'at',
+  'name-cellar',
+  'read-along',
+]);
+
 function readLine(terms: readonly Term[], setBoard: SetBoard): LineRead {
-  const board = setBoard(terms);
-  const draft = readDraft(board);
+  let board = setBoard(terms);
+  let draft = readDraft(board);
+  if (draft.command && ALONE.has(draft.command.name)) {
+    board = setBoard(terms);
+    draft = readDraft(board, { isNoTalk: true });
+  }
   const { vessel, vessels } = draft.fields;
   const says = (field: string): boolean => board.findings.some((finding) => finding.field === field);
   return {

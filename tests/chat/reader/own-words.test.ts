@@ -37,7 +37,7 @@ test('none of them states or does anything behind an "if"', () => {
   expect(done).toEqual([]);
 });
 
-const WRITES = ['undo', 'unwatch', 'watch', 'later', 'order', 'set', 'set-wrong', 'forget', 'forget-me', 'backup', 'told', 'capacity', 'racked', 'topped', 'acid', 'moved', 'blended', 'emptied', 'lot']; // prettier-ignore
+const WRITES = ['undo', 'unwatch', 'watch', 'later', 'order', 'set', 'set-wrong', 'forget', 'forget-me', 'backup', 'told', 'capacity', 'racked', 'topped', 'acid', 'moved', 'blended', 'emptied', 'lot', 'added-it', 'invite', 'remove-person', 'make-person', 'name-cellar', 'read-along']; // prettier-ignore
 
 test('a question changes nothing, unless it asks the bot to do it', () => {
   const done = OWN.filter((text) => !text.startsWith('can you')).filter((text) =>

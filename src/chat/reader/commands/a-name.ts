@@ -1,8 +1,8 @@
 /** Longer names nobody types; own threshold. */
 const LONGEST = 40;
 
-/** One to four words of letters, as people and cellars are called; a figure stands in them only alone (`person 3`). */
-const NAME = /^\p{L}[\p{L}\p{M}'’.&-]*(?: (?:&|\d{1,6}|\p{L}[\p{L}\p{M}'’.-]*)){0,3}$/u;
+/** One to four words of letters, as people and cellars are called. */
+const NAME = /^\p{L}[\p{L}\p{M}'’.&-]*(?: (?:&|\p{L}[\p{L}\p{M}'’.-]*)){0,3}$/u;
 
 /** Whether some words could be what somebody or something is called. */
 export function isAName(text: string): boolean {

@@ -1,5 +1,6 @@
 import type { Command, SaidRole } from '../command.ts';
 import type { Piece } from '../own-pieces.ts';
+import type { OwnWordId } from '../words/words.ts';
 import { isAName } from './a-name.ts';
 import type { Talk } from './talk.ts';
 import { says, saysOnly } from './talk.ts';
@@ -46,12 +47,21 @@ function readMake({ board, said }: Talk): Command | undefined {
   return { name: 'make-person', who, role };
 }
 
+const NO_NAMES: ReadonlySet<OwnWordId> = new Set<OwnWordId>([
+  'ask',
+  'this',
+  'filler',
+  'article',
+  'who',
+  'if',
+  'not',
+]);
+
 /** Words by which nobody is called. */
-const isOfTheBot = ({ ids }: Piece): boolean =>
-  ids.some((id) => id === 'ask' || id === 'this' || id === 'filler' || id === 'article' || id === 'who');
+const isOfTheBot = ({ ids }: Piece): boolean => ids.some((id) => NO_NAMES.has(id));
 
 /** A name as it is written, or a number that a sheet gives to somebody without one. */
-const isPerson = (who: string): boolean => isAName(who);
+const isPerson = (who: string): boolean => isAName(who) || /^person \d{1,6}$/i.test(who);
 
 /** Reads what is done about people: `invite hand`, `remove Ben`, `Ben is keeper`, `make Ben a guest`. */
 export function readPersonWord(talk: Talk): Command | undefined {

@@ -16,6 +16,6 @@ export function textBetween({ message, folded, terms }: Board, from: Piece | und
 function bare(text: string): string {
   return text
     .trim()
-    .replaceAll(/^[\s"“„«']+|[\s"”“»'.!]+$/gu, '')
+    .replaceAll(/^[\s:"“„«']+|[\s"”“»'.!]+$/gu, '')
     .trim();
 }

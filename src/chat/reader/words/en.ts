@@ -700,7 +700,7 @@ export const en: Words = {
     keeper: ['keeper', 'keepers'],
     hand: ['hand', 'hands', 'cellar hand', 'cellarhand'],
     guest: ['guest', 'guests'],
-    'as-role': ['as', 'someone', 'somebody', 'another', 'new', 'one', 'person', 'to be', 'for'],
+    'as-role': ['as', 'someone', 'somebody', 'another', 'one', 'person', 'to be', 'for'],
     people: ['people', 'who is here', "who's here", 'whos here', 'who is in here', 'members', 'who may do what', 'who is keeper', 'who is the keeper', 'who are the keepers', "who's keeper", 'roles', 'who has access', 'people here'],
     remove: ['remove', 'kick out', 'throw out'],
     'make-role': ['make', 'set'],
