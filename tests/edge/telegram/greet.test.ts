@@ -23,7 +23,7 @@ test('once it is reached the operator hears so, and the next failure is a first 
     }
     return { username: 'harbour_cellar_bot' };
   };
-  const platform = { once: { getMe } } as unknown as Platform;
+  const platform = { calls: { getMe } } as unknown as Platform;
   expect(await greet(platform, { backOff, log, tell, signal })).toBe(true);
   await backOff.failed(failure);
   expect(told.slice(2, 4)).toEqual([
