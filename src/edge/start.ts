@@ -23,7 +23,7 @@ export async function start(args: readonly string[]): Promise<void> {
   operator = createOperator(environment['BOT_TOKEN']);
   const config = await readConfig(environment);
 
-  if (options.does === 'restore' || options.does === 'rebuild') {
+  if (options.does !== 'serve') {
     const { runUpkeep } = await import('./upkeep/run-upkeep.ts');
     process.stdout.write(`${await runUpkeep(options, { dataFile: config.dataFile, operator })}\n`);
     return;

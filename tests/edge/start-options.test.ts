@@ -5,6 +5,7 @@ test.each([
   [[], { does: 'serve' }],
   [['--demo'], { does: 'demo' }],
   [['--rebuild'], { does: 'rebuild' }],
+  [['--backup'], { does: 'backup' }],
   [['--restore', 'data/backups/copy.db'], { does: 'restore', copy: 'data/backups/copy.db' }],
 ])('%j is read as %j', (args, options) => {
   expect(readStartOptions(args)).toEqual(options);

@@ -18,6 +18,10 @@ export async function runUpkeep(
     const { restoreData } = await import('./restore-data.ts');
     return restoreData({ copy: options.copy, dataFile, now: now() });
   }
+  if (options.does === 'backup') {
+    const { backupData } = await import('./backup-data.ts');
+    return backupData(dataFile, now());
+  }
   const { rebuildData } = await import('./rebuild-data.ts');
   return rebuildData(dataFile, { now, report: (damage) => operator.tell(damage.message) });
 }
