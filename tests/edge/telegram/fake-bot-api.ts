@@ -2,6 +2,9 @@ import { createServer, type IncomingMessage, type ServerResponse } from 'node:ht
 import type { AddressInfo, Socket } from 'node:net';
 
 import { faultsOfCall } from './bot-api-schema.ts';
+import { TOKEN } from './token.ts';
+
+export { TOKEN };
 
 /** What goes wrong with one call. */
 export type Fault =
@@ -27,9 +30,6 @@ export interface Delivered {
 type Params = Record<string, unknown>;
 type Update = { readonly update_id: number } & Record<string, unknown>;
 
-/** The token that the fake accepts. */
-export const TOKEN = '4455667788:a-made-up-token-of-an-invented-cellar';
-
 /**
  * A Bot API on this machine: true long polling, offsets that confirm, one poller at a time, and faults on request.
  * Every call is checked against the published schema.
@@ -46,6 +46,8 @@ export class FakeBotApi implements AsyncDisposable {
   /** Everything below this number has been confirmed. */
   confirmed = 0;
   root = '';
+  /** While it is away every call is cut. */
+  away = false;
   /** How long a second of `retry_after` is here, for bots whose clock runs faster. */
   second_ms = 1000;
 
@@ -113,6 +115,7 @@ export class FakeBotApi implements AsyncDisposable {
   }
 
   async #serve(request: IncomingMessage, response: ServerResponse): Promise<void> {
+    if (this.away) return void request.socket.destroy();
     let body = '';
     for await (const part of request) body += String(part);
     const [, token, method = ''] = /^\/bot([^/]+)\/(\w+)$/.exec(request.url ?? '') ?? [];
