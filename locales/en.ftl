@@ -1261,7 +1261,7 @@ picture-head = { $vessel } since { $day }. Readings: { $readings }, additions: {
 picture-last = { $list }.
 picture-last-free = free { $value } { $unit } ({ $day })
 picture-last-total = total { $value } { $unit } ({ $day })
-picture-last-bound = bound { $value } { $unit }
+picture-last-bound = bound { $value } { $unit } ({ $day })
 picture-needs = pH { $ph } ({ $day }): { $molecular } molecular takes { $needed } free.
 picture-needs-nothing =
     { $why ->

@@ -394,7 +394,7 @@ export interface SentenceValues {
   'picture-head': 'additions' | 'day' | 'readings' | 'vessel';
   'picture-is-odd': 'days';
   'picture-last': 'list';
-  'picture-last-bound': 'unit' | 'value';
+  'picture-last-bound': 'day' | 'unit' | 'value';
   'picture-last-free': 'day' | 'unit' | 'value';
   'picture-last-total': 'day' | 'unit' | 'value';
   'picture-limit': 'limit';
