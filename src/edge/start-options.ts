@@ -3,7 +3,8 @@ import { OperatorError } from './operator-error.ts';
 
 /** What the program is to do: to serve, or to show an invented cellar, or to see to the cellar's file and end. */
 export type StartOptions =
-  | { readonly does: 'serve' | 'demo' }
+  | { readonly does: 'serve' }
+  | { readonly does: 'demo' }
   | { readonly does: 'rebuild' | 'backup' }
   | { readonly does: 'restore'; readonly copy: string };
 
