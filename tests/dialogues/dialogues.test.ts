@@ -1,7 +1,8 @@
 import { readFileSync, readdirSync } from 'node:fs';
 import { expect, test } from 'vitest';
 import { DEFAULT_SETTINGS, type Settings } from '../../src/chat/conversation/settings.ts';
-import { fits, play, readScene } from './scene.ts';
+import { play, readScene } from './scene.ts';
+import { fits } from './shown-lines.ts';
 
 const scenes = readdirSync(import.meta.dirname)
   .filter((name) => name.endsWith('.txt'))

@@ -12,6 +12,7 @@ import { createRegistry } from '../../src/edge/cellars/registry.ts';
 import { makeServeDue } from '../../src/edge/serve-due.ts';
 import { makeServe, type Serve } from '../../src/edge/serve-message.ts';
 import { createMemoryCellars } from '../../src/edge/store/memory-cellars.ts';
+import { CODE, linesOf, unaskedLines, type SaidUnasked } from './shown-lines.ts';
 
 const MOVES = [
   'them',
@@ -94,12 +95,6 @@ function readTime(text: string): number {
   const match = /^(\d+) ?(|min|h|d)$/.exec(text.trim());
   if (!match) throw new SyntaxError(`Cannot read the time of a scene "${text}"`);
   return Number(match[1]) * MINUTES_A[match[2] as keyof typeof MINUTES_A] * 60_000;
-}
-
-/** Something that is said unasked, and in which chat. */
-export interface SaidUnasked {
-  readonly chat: string;
-  readonly said: Said;
 }
 
 /** What a scene can be played with. */
@@ -212,15 +207,6 @@ function serving(store: CellarStore, settings: Settings, door?: Door): Serve {
   return makeServe({ handle, say, store, settings, report, ...(door && { door }) });
 }
 
-function unaskedLines(sent: readonly SaidUnasked[], present: string): string[] {
-  let chat = present;
-  return sent.flatMap((one) => {
-    const head = one.chat === chat ? [] : [`(${one.chat})`];
-    ({ chat } = one);
-    return [...head, ...linesOf(one.said)];
-  });
-}
-
 /** What a person sees, and wrote last. */
 interface Screen {
   readonly shown: readonly Said[];
@@ -242,26 +228,4 @@ function contentOf(
     .flatMap(({ buttons }) => buttons)
     .find(({ label, key }) => label === what || key === what);
   return { kind: 'press', key: button?.key ?? what };
-}
-
-/** The codes of a scene: the cellar, and the place of the message in the scene. */
-const CODE = /\w+-\d{24}/;
-
-function linesOf({ text: said, buttons, replaces }: Said): string[] {
-  const text = said.replace(CODE, '(code)');
-  const row = buttons.map(({ mark, label }) => `${mark} ${label}`).join(' | ');
-  // Thin spaces cannot be told from others in a scene's file.
-  return [
-    ...(replaces === undefined ? [] : ['(in place)']),
-    ...text.replaceAll('\u202f', ' ').split('\n'),
-    ...(row === '' ? [] : [`[${row}]`]),
-  ];
-}
-
-/** Whether an answer is as the scene has it, `…` standing for any lines. */
-export function fits(expected: readonly string[], actual: readonly string[]): boolean {
-  const [first, ...rest] = expected;
-  if (first === undefined) return actual.length === 0;
-  if (first !== '…') return actual[0] === first && fits(rest, actual.slice(1));
-  return actual.some((_, skipped) => fits(rest, actual.slice(skipped))) || fits(rest, []);
 }

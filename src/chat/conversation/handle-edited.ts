@@ -62,7 +62,8 @@ export async function handleEdited(
     };
   const { waiting: _waiting, askedTarget: _asked, ...others } = memory;
   const done = new Set(before.map(({ key }) => key));
-  const fresh = { ...asText, event, done, memory: { ...others, lastButtons: [] } };
+  // The cautions of the answer that goes away go with it: they are said in full again.
+  const fresh = { ...asText, event, done, memory: { ...others, lastButtons: [], cautionedOn: {} } };
   const handled = await handleText(text, fresh, view);
   return { ...sampledThen(handled, original_at, here), replies: replacing(handled, original) };
 }

@@ -34,10 +34,12 @@ export async function forgetPerson(here: Here, view: CellarView): Promise<Handle
     ...(isLast && { firstKeeper: next }),
   };
   const values = { number: String(me) };
-  const writes: Write[] = [
-    { kind: 'drop', key: memoryKey(message) },
-    ...(known ? [{ kind: 'forget-person', number: me } as const, keepingRoster(role)] : []),
-  ];
+  // Nobody becomes more than a guest by coming again as somebody new; guests have noted nothing.
+  const forgetting: Write[] =
+    here.role === 'guest'
+      ? [{ kind: 'person', id: message.person, number: me }]
+      : [{ kind: 'forget-person', number: me }, keepingRoster(role)];
+  const writes: Write[] = [{ kind: 'drop', key: memoryKey(message) }, ...(known ? forgetting : [])];
   return {
     writes,
     replies: [
