@@ -1131,7 +1131,6 @@ picture-none =
         [none] Of which vessel? Like: picture T4
        *[other] I know nothing of { $vessel } yet, so there is nothing to draw.
     }
-picture-not-here = I draw no pictures in this chat. In words: { $vessel }?
 stranger = This bot is for invited people. If you have a code, send: join and the code
 too-fast = Too many messages at once: I pass over yours for a minute. Then send again what I did not answer.
 

@@ -2,9 +2,9 @@ import type { CellarStore } from '../core/cellar/cellar-store.ts';
 import type { Errand, IncomingMessage } from '../chat/conversation/ports.ts';
 import type { Settings } from '../chat/conversation/settings.ts';
 import type { Line } from '../chat/replies/reply.ts';
-import { vesselName } from '../chat/replies/vessel-name.ts';
 import type { Said, Say } from '../chat/replies/say.ts';
-import type { ExportFile } from './files/make-export.ts';
+import type { Brought, BroughtFile } from './brought.ts';
+import { runPicture } from './run-picture.ts';
 import type { Serve } from './serve-message.ts';
 
 /** What errands need. */
@@ -18,14 +18,8 @@ export interface Errands {
   /** Where a backup goes; absent where none is made from this chat. */
   readonly backupPath?: (now: number) => Promise<string>;
   /** Puts a file where the person finds it and gives the path; absent where the chat itself carries files. */
-  readonly handOver?: (file: ExportFile) => Promise<string>;
+  readonly handOver?: (file: BroughtFile) => Promise<string>;
   readonly report: (fault: unknown) => void;
-}
-
-/** What an errand brings back: something to say, and perhaps a file to hand over. */
-export interface Brought {
-  readonly said: readonly Said[];
-  readonly file?: ExportFile;
 }
 
 /** Makes the running of errands: exports, imports and backups, off the reply path. Never rejects. */
@@ -51,17 +45,26 @@ async function runErrand(errand: Errand, message: IncomingMessage, errands: Erra
     case 'backup':
       return runBackup(message, errands);
     case 'picture':
-      return {
-        said: [saying('picture-not-here', { vessel: vesselName(errand.vessel) }, message, errands.say)],
-      };
+      return handedOver(await runPicture(errand, message, errands), message, errands);
   }
+}
+
+/** What is brought, with the file put where the person finds it, where the chat itself carries none. */
+async function handedOver(
+  { said, file }: Brought,
+  message: IncomingMessage,
+  { handOver, say }: Errands,
+): Promise<Brought> {
+  if (file === undefined || handOver === undefined) return { said, ...(file && { file }) };
+  return { said: [...said, saying('export-written', { path: await handOver(file) }, message, say)] };
 }
 
 async function runExport(
   errand: Extract<Errand, { kind: 'export' }>,
   message: IncomingMessage,
-  { store, say, handOver }: Errands,
+  errands: Errands,
 ): Promise<Brought> {
+  const { store, say } = errands;
   const { from, to, vessel, format, zone, decimalMark, language } = errand;
   // From the beginning on: what was known of a wine then follows from all that came before.
   const { entries, people } = await store.look(message.cellar, async (view) => ({
@@ -81,8 +84,7 @@ async function runExport(
   const { makeExport } = await import('./files/make-export.ts');
   const request = { entries, people, span, format, zone, decimalMark, language };
   const file = await makeExport(request, say);
-  if (handOver === undefined) return { said: [], file };
-  return { said: [saying('export-written', { path: await handOver(file) }, message, say)] };
+  return handedOver({ said: [], file }, message, errands);
 }
 
 async function runImport(

@@ -93,6 +93,10 @@ export type Errand =
   | {
       readonly kind: 'picture';
       readonly vessel: string;
+      /** What the free SO2 that a pH asks for is reckoned by. */
+      readonly targets: Settings['targets'];
+      readonly basis: Settings['basis'];
+      readonly unit: 'mg/L' | 'ppm';
       readonly zone: string;
       readonly language: Language;
       readonly decimalMark: '.' | ',';

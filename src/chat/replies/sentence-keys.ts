@@ -403,7 +403,6 @@ export interface SentenceValues {
   'picture-needs': 'day' | 'molecular' | 'needed' | 'ph';
   'picture-needs-nothing': 'why';
   'picture-none': 'vessel';
-  'picture-not-here': 'vessel';
   'picture-nothing': 'vessel';
   'picture-odd': never;
   'picture-total': 'day' | 'total';

@@ -18,6 +18,9 @@ export function drawPicture(vessel: string | undefined, here: Here): Handled {
     errand: {
       kind: 'picture',
       vessel,
+      targets: settings.targets,
+      basis: settings.basis,
+      unit: memory.concentrationUnit === 'ppm' ? 'ppm' : 'mg/L',
       zone: zoneOf(settings),
       language: settings.language,
       decimalMark: memory.decimalMark ?? '.',

@@ -1,0 +1,14 @@
+import type { Said } from '../chat/replies/say.ts';
+
+/** A file to hand over; a picture is shown as one where the chat can. */
+export interface BroughtFile {
+  readonly name: string;
+  readonly bytes: Uint8Array;
+  readonly isPicture?: true;
+}
+
+/** What an errand brings back: something to say, and perhaps a file to hand over. */
+export interface Brought {
+  readonly said: readonly Said[];
+  readonly file?: BroughtFile;
+}
