@@ -9,6 +9,7 @@ import { turnAway } from './cellar/turn-away.ts';
 import { scheduleDaily } from './daily.ts';
 import { handleEdited } from './handle-edited.ts';
 import { handleFile } from './handle-file.ts';
+import { withoutMentions } from '../reader/without-mentions.ts';
 import { arrive, type Here } from './here.ts';
 import { eventKey } from './keys.ts';
 import { greeting } from './note.ts';
@@ -28,10 +29,17 @@ export async function handle(
   view: CellarView,
   defaults: Settings,
 ): Promise<Handled> {
-  const here = await arrive(message, view, defaults);
+  const here = await arrive(withoutCall(message), view, defaults);
   if (!isForUs(here)) return { writes: [], replies: [] };
   const handled = await handleAddressed(here, view);
   return namingCellar(handled, message);
+}
+
+/** Whom a message calls by name is no part of what it says. */
+function withoutCall(message: IncomingMessage): IncomingMessage {
+  const { content } = message;
+  if ((content.kind !== 'text' && content.kind !== 'edited') || !content.text.includes('@')) return message;
+  return { ...message, content: { ...content, text: withoutMentions(content.text).trim() } };
 }
 
 async function handleAddressed(here: Here, view: CellarView): Promise<Handled> {

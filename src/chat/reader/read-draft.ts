@@ -74,6 +74,9 @@ export function readDraft(board: Board, how: { readonly isNoTalk?: boolean } = {
   if (board.marks.fruitByWeight) board.notes.push({ id: 'fruit-by-weight', text: '' });
   noteUnread(board, intent);
   if (board.pieces.some(({ ids }) => ids.includes('if'))) board.marks.conditional = true;
+  if (board.pieces.some(({ ids }) => ids.includes('acid'))) board.marks.acid = true;
+  const toCome = board.pieces.find(({ ids }) => ids.includes('tomorrow') || ids.includes('next-week'));
+  if (toCome) board.marks.toCome = toCome.text;
   const also = intent === 'chat' ? undefined : alsoSaid(board);
   if (also) board.marks.alsoSaid = also;
   return draft;

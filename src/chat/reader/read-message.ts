@@ -17,6 +17,7 @@ import { takeRemark } from './take-remark.ts';
 import { isStrange, topicOf } from './topic.ts';
 import type { AwaitedField, Reading, ReaderSettings, Understood } from './understood.ts';
 import { readWaiting } from './waiting-answer.ts';
+import { withoutMentions } from './without-mentions.ts';
 import type { Tag } from './words/words.ts';
 
 /** The longest message that is read, in UTF-16 units; the platform's own limit. */
@@ -80,7 +81,7 @@ function readOne(board: Board, settings: ReaderSettings): Reading {
 /**
  * Reads a message: the one door of the reader. Never throws, whatever the text holds.
  *
- * @param text The message as it came.
+ * @param message The message as it came.
  * @param settings What has to be known of the chat.
  * @param waiting The question that the bot still waits for, so that a bare number is its answer.
  * @returns The readings, each with what was said, assumed, asked and wrong.
@@ -91,7 +92,8 @@ function readOne(board: Board, settings: ReaderSettings): Reading {
  * readMessage('hi', READER_DEFAULTS).readings[0].intent // => 'chat'
  * ```
  */
-export function readMessage(text: string, settings: ReaderSettings, waiting?: AwaitedField): Understood {
+export function readMessage(message: string, settings: ReaderSettings, waiting?: AwaitedField): Understood {
+  const text = withoutMentions(message);
   const decimalMark = /\d,\d{1,2}(?!\d)/.test(text) && !/\d\.\d/.test(text) ? ',' : '.';
   const understood = (
     readings: readonly Reading[],

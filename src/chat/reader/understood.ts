@@ -137,6 +137,10 @@ export interface Marks {
   alsoSaid?: 'racked' | 'moved' | 'topped' | 'blended' | 'acid';
   /** The message says "if": nothing of it is a fact. */
   conditional?: true;
+  /** An acid, or what takes acid away, was named. */
+  acid?: true;
+  /** Something of it is still to come: the person’s own word for when. */
+  toCome?: string;
   /** The volume was asked about: what was said, and what the vessel is known to hold, in litres. */
   volumeChoices?: readonly number[];
 }

@@ -653,7 +653,11 @@ export const en: Words = {
     empty: ['empty', 'now empty', 'is empty', 'is now empty', 'empty now'],
     acidified: ['acidified', 'acidulated', 'acidified with', 'acid adjusted'],
     'went-in': ['added', 'put', 'put in', 'dosed', 'gave', 'got', 'tipped in', 'stirred in', 'mixed in'],
-    acid: ['acid', 'tartaric', 'tartaric acid', 'malic acid', 'citric acid', 'lactic acid', 'acid addition', 'acids'],
+    acid: [
+      'acid', 'tartaric', 'tartaric acid', 'malic acid', 'citric', 'citric acid', 'lactic acid', 'acid addition', 'acids',
+      'potassium bicarbonate', 'bicarbonate', 'calcium carbonate', 'carbonate', 'chalk', 'khco3', 'caco3', 'potassium carbonate',
+      'double salt',
+    ],
     some: ['some', 'more', 'bit of', 'a bit of', 'a little'],
     holds: ['holds', 'can hold', 'hold', 'takes', 'can take', 'will hold', 'fits', 'holds up to'],
     capacity: ['capacity', 'max', 'maximum', 'size', 'full at', 'is full at', 'when full', 'capacity is', 'max capacity', 'total capacity'],
