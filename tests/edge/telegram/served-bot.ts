@@ -11,7 +11,7 @@ const BEGUN_MS = performance.now();
 
 /** A clock on which a second passes in a millisecond. */
 export const hastyClock: Clock = {
-  now: () => 1_767_000_100_000 + 1000 * (performance.now() - BEGUN_MS),
+  now: () => Math.round(1_767_000_100_000 + 1000 * (performance.now() - BEGUN_MS)),
   wait: (ms, signal) => systemClock.wait(ms / 1000, signal),
 };
 

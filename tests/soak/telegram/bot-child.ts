@@ -1,5 +1,5 @@
 /**
- * The bot as a process of its own, without the platform's limits so that a run is short:
+ * The bot as a process of its own, without the platform's limits unless LIMITS is set, so that a run is short:
  * `node bot-child.ts ROOT FILE [PORT]`. With a port it is brought its updates, else it polls. Its log goes to stdout.
  */
 import { handle } from '../../../src/chat/conversation/conversation.ts';
@@ -11,7 +11,7 @@ import { createLog } from '../../../src/edge/logging.ts';
 import { makeServeTurn } from '../../../src/edge/serve-message.ts';
 import { stopSignal } from '../../../src/edge/stop-signal.ts';
 import { openSqliteStore } from '../../../src/edge/store/sqlite/open-sqlite-store.ts';
-import { NO_LIMITS } from '../../../src/edge/telegram/pace.ts';
+import { NO_LIMITS, USUAL_LIMITS } from '../../../src/edge/telegram/pace.ts';
 import { serveTelegram } from '../../../src/edge/telegram/serve-telegram.ts';
 import { TOKEN } from '../../edge/telegram/token.ts';
 
@@ -35,6 +35,6 @@ await serveTelegram({
   }),
   tell: () => undefined,
   signal: stopSignal(),
-  limits: NO_LIMITS,
+  limits: process.env['LIMITS'] === 'usual' ? USUAL_LIMITS : NO_LIMITS,
 });
 await store.close();
