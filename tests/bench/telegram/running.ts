@@ -17,7 +17,10 @@ export interface Running {
   readonly offer: (
     offer: Offer,
   ) => Promise<Outcome & { readonly cpu_ms: number; readonly memory_MB: number }>;
-  readonly stop: () => Promise<void>;
+  /** Lines of the bot's log so far. */
+  readonly logged: string[];
+  /** Ends both; `look` may read the cellar's file in between. */
+  readonly stop: (look?: (file: string) => Promise<void>) => Promise<void>;
 }
 
 const here = (path: string): string => fileURLToPath(new URL(path, import.meta.url));
@@ -43,21 +46,25 @@ export async function startBot(name: BotName): Promise<Running> {
       ? [here('bare-bot.ts'), root]
       : [here('../../soak/telegram/bot-child.ts'), root, join(folder, 'cellar.db')];
   const env = { ...process.env, ...(name === 'ours within limits' && { LIMITS: 'usual' }) };
-  const bot = spawn(process.execPath, args, { stdio: ['ignore', 'inherit', 'inherit'], env });
+  const bot = spawn(process.execPath, args, { stdio: ['ignore', 'pipe', 'inherit'], env });
+  const logged: string[] = [];
+  bot.stdout.on('data', (lines: Buffer) => logged.push(...lines.toString().trim().split('\n')));
   await first;
   const cold_ms = performance.now() - begun;
   return {
     cold_ms,
+    logged,
     offer: async (offer) => {
       const before = cpuOf(bot);
       const outcome = await ask(offer);
       return { ...outcome, cpu_ms: cpuOf(bot) - before, memory_MB: memoryOf(bot) };
     },
-    stop: async () => {
+    stop: async (look) => {
       bot.kill('SIGTERM');
       await once(bot, 'close');
       platform.kill();
       await once(platform, 'close');
+      await look?.(join(folder, 'cellar.db'));
       rmSync(folder, { recursive: true });
     },
   };
