@@ -688,7 +688,11 @@ read-kept =
         [new] Kept, { $vessel } is new to me: { $list }.
        *[known] Read and kept: { $list }.
     }
-noted-something-else = Noted { $entry }, not calculated: { $vessel } { $text }, { $when }.
+noted-something-else =
+    Noted { $entry }, not calculated: { $vessel } { $text }, { $when }.{ $voids ->
+        [ph] { " " }The pH has to be measured again.
+       *[none] { "" }
+    }
 reading-kept = { at }{ $list }: kept, { $when }.
 button-added = I added it
 button-mine = I do this one
@@ -708,7 +712,7 @@ backup-written = Backup written: { $path }
 errand-failed = That did not work, and nothing was written. Please try again; if it fails again, tell whoever runs me.
 backup-elsewhere = Whoever runs me makes the backups. This cellar’s log you take away with: export all
 button-undo = Undo { $entry }
-button-done = { $entry } is done
+button-done = Order { $entry } done
 button-remind = Remind me in 24 h
 added-confirm = { at }{ $added } is { $list }. Note it?
 added-confirm-bare = { at }{ $added } SO2. Note it?
@@ -734,8 +738,18 @@ odd-empty = { $vessel } is down as empty since { $when }.
 odd-from-empty = { $vessel } was down as empty since { $when }.
 odd-over-capacity = { $volume } is more than the { $capacity } that { $vessel } holds.
 when-noon = No hour told: noted for noon.
-when-future = { $vessel }: “{ $text }” is still to come ({ $when }). Not noted. When was it?
-when-no-such-day = { $vessel }: there is no such day as “{ $text }”. Not noted. When was it?
+when-future =
+    { at }“{ $text }” is still to come{ $when ->
+        [none] { "" }
+       *[other] { " " }({ $when })
+    }. Not noted. Send it again with the time it was.
+when-no-such-day = { at }there is no such time as “{ $text }”. Not noted. Send it again with the time it was.
+vessel-new = { $vessel } is new to me.
+volume-differs =
+    { $vessel }: { $known ->
+        [none] { $said } is more than it holds
+       *[other] { $said } is not the { $known } I had
+    }: not kept. If it is right, write: { $vessel } is { $written } now
 ask-zone = I tell times in UTC. Which zone are you in? Write: time zone Europe/Madrid
 dosed-who =
     { $who ->
@@ -907,6 +921,7 @@ vessel-void =
        *[other] Volume
     } not known since { $day }: { $event ->
         [malolactic] malolactic
+        [fermentation] it was must then
         [blended] blended
         [acid] acid added
         [racked] racked

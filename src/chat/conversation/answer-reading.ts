@@ -10,6 +10,7 @@ import { answerOtherAddition } from './intents/other-addition.ts';
 import { answerProblem } from './intents/problem.ts';
 import { answerReading as answerKeptReading } from './intents/reading.ts';
 import { answerSolution } from './intents/solution.ts';
+import { whenIsUnclear } from './intents/when-unclear.ts';
 import { line } from './lines/line.ts';
 import type { Outcome, Turn } from './outcome.ts';
 
@@ -37,9 +38,18 @@ function saysSomething({ lines, inRound }: Outcome): boolean {
   );
 }
 
+/** A sample that is still to be taken tells nothing; of a dose for tomorrow only its own hour counts. */
+function sampledWhen(reading: Reading, turn: Turn): Outcome | undefined {
+  const isOfSample =
+    reading.intent === 'reading' || (reading.intent === 'dose' && reading.when !== undefined);
+  return isOfSample ? whenIsUnclear(reading, turn) : undefined;
+}
+
 function answerByIntent(reading: Reading, language: Language, turn: Turn): Outcome {
   if (reading.intent === 'emergency') return answerEmergency(language, reading.topic);
   if (reading.problems.length > 0) return answerOtherAddition(reading, turn) ?? answerProblem(reading, turn);
+  const unsaid = reading.when || reading.marks.toCome ? sampledWhen(reading, turn) : undefined;
+  if (unsaid) return unsaid;
   switch (reading.intent) {
     case 'dose':
       return answerDoseOfVessel(reading, turn);

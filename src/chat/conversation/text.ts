@@ -62,14 +62,9 @@ function followsChoice({ lastButtons, lastWasChosen }: Memory): boolean {
 }
 
 /** "I added it": what was reckoned for that vessel last went in, or what stands above. */
-function addedAsPlanned(
-  { intent, fields, asks, problems, command }: Reading,
-  here: Here,
-): string | undefined {
-  const { vessel, ...others } = fields;
-  const isBare = intent === 'added' && asks.includes('mass_g') && problems.length === 0;
-  if (!isBare && command?.name !== 'added-it') return undefined;
-  if (Object.keys(others).some((name) => name !== 'additive')) return undefined;
+function addedAsPlanned({ fields, command }: Reading, here: Here): string | undefined {
+  const { vessel } = fields;
+  if (command?.name !== 'added-it') return undefined;
   if (vessel === undefined) return here.memory.lastButtons.find((key) => parseKey(key)?.does === 'a');
   const plan = here.plans.get(vessel);
   return plan?.chat === here.message.chat ? `a:${plan.ref}` : undefined;

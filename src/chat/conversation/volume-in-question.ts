@@ -22,7 +22,7 @@ export function volumeInQuestion(reading: Reading, here: Here): Reading | undefi
   if (fields.target === undefined && STAGES_WITHOUT_TARGET.includes(stage)) return undefined;
   if (vessel === undefined || volume_L === undefined || recalled?.volume_L !== undefined) return undefined;
   // What went in is a fact, whatever volume it is told with.
-  if (intent !== 'dose' && intent !== 'effect') return undefined;
+  if (intent !== 'dose' && intent !== 'effect' && intent !== 'reading') return undefined;
   if (problems.length > 0 || marks.volumeChoices || marks.conditional) return undefined;
   const known_L = vessel.volume_L?.value;
   const capacity_L = vessel.capacity_L?.value;

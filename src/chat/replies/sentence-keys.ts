@@ -352,7 +352,7 @@ export interface SentenceValues {
   'noted-bare': 'added' | 'entry' | 'vessel' | 'when';
   'noted-measure': 'when';
   'noted-measure-now': never;
-  'noted-something-else': 'entry' | 'text' | 'vessel' | 'when';
+  'noted-something-else': 'entry' | 'text' | 'vessel' | 'voids' | 'when';
   'noted-vessel': 'entry' | 'list' | 'voids';
   'nothing-why': 'free' | 'kind' | 'molecular' | 'ph' | 'value';
   'nothing-why-free': 'free' | 'kind' | 'value';
@@ -558,6 +558,7 @@ export interface SentenceValues {
   'vessel-check-due': 'when' | 'why';
   'vessel-empty': 'day' | 'vessel';
   'vessel-head': 'list' | 'vessel';
+  'vessel-new': 'vessel';
   'vessel-order': 'entry' | 'list' | 'when' | 'who';
   'vessel-readings': 'list';
   'vessel-unknown': 'vessel';
@@ -566,6 +567,7 @@ export interface SentenceValues {
   'vessels-head': 'count' | 'due' | 'number';
   'vessels-line': 'check' | 'day' | 'free' | 'lot' | 'next' | 'vessel';
   'vessels-none': never;
+  'volume-differs': 'known' | 'said' | 'vessel' | 'written';
   'warning-addition-large': 'dose_mg_L' | 'unit';
   'warning-additive-not-permitted': 'additive';
   'warning-already-dosed': never;

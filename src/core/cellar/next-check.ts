@@ -15,7 +15,7 @@ export interface NextCheck {
   readonly urges_dose: boolean;
 }
 
-/** What moves and ferments is measured for other things: nothing is due but the landing of an addition. */
+/** What ferments is measured for other things, and what SO2 went in before binds: nothing is due of it. */
 const STAGES_WITHOUT_CHECKS: readonly Stage[] = ['must', 'fermenting'];
 
 /**
@@ -39,6 +39,7 @@ const STAGES_WITHOUT_CHECKS: readonly Stage[] = ['must', 'fermenting'];
 export function nextCheck(vessel: Vessel, settings: CheckSettings): NextCheck | undefined {
   const stage = vessel.traits.stage?.value;
   if (vessel.empty !== undefined || vessel.unwatched === true || stage === 'bottled') return undefined;
+  if (stage !== undefined && STAGES_WITHOUT_CHECKS.includes(stage)) return undefined;
   const urges_dose = stage === undefined || !UNFINISHED_STAGES.includes(stage);
   const is_low = urges_dose && vessel.free_mg_L !== undefined && vessel.free_mg_L.value < LOW_FREE_mg_L;
   const later = vessel.later ?? -Infinity;
@@ -48,7 +49,6 @@ export function nextCheck(vessel: Vessel, settings: CheckSettings): NextCheck | 
     const at = Math.max(added_at + settings.after_addition_hours * HOUR_ms, later);
     return { at, why: 'landing', is_low, urges_dose };
   }
-  if (stage !== undefined && STAGES_WITHOUT_CHECKS.includes(stage)) return undefined;
   const why = is_low || isBarrel(vessel.vessel) ? 'often' : 'usual';
   const days = why === 'often' ? settings.often_days : settings.usual_days;
   return { at: Math.max(unmeasuredSince(vessel) + days * DAY_ms, later), why, is_low, urges_dose };

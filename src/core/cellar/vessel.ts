@@ -54,7 +54,7 @@ export interface OpenOrder extends AdditiveNoted, AmountNoted {
 
 /** What made a fact void, and when. */
 export interface Voided {
-  readonly event: 'malolactic' | 'blended' | 'acid' | 'racked' | 'topped' | 'moved';
+  readonly event: 'fermentation' | 'malolactic' | 'blended' | 'acid' | 'racked' | 'topped' | 'moved';
   readonly at: number;
 }
 

@@ -1,3 +1,4 @@
+import type { Stage } from '../wine.ts';
 import type { Entry, WineTraits } from './entry.ts';
 import type { Known, KnownTraits, Vessel } from './vessel.ts';
 
@@ -33,9 +34,16 @@ export function withTraits(vessel: Vessel, told: WineTraits, { at, entry }: Entr
   const traits: KnownTraits = { ...vessel.traits, ...Object.fromEntries(fresh) };
   const changed = { ...vessel, traits };
   const before = vessel.traits.stage?.value;
+  if (isFermented(before, told.stage)) return withoutPH({ ...changed, unlanded: [] }, 'fermentation', at);
   const isMalolactic = told.stage !== undefined && told.stage !== before;
   if (!isMalolactic || (before !== 'malolactic' && told.stage !== 'malolactic')) return changed;
   return withoutPH(changed, 'malolactic', at);
+}
+
+/** Whether what was must is wine now: its pH is another, and what went into the must has bound. */
+function isFermented(before: Stage | undefined, now: Stage | undefined): boolean {
+  const isMust = before === 'must' || before === 'fermenting';
+  return isMust && now !== undefined && now !== 'must' && now !== 'fermenting';
 }
 
 /**
@@ -50,7 +58,11 @@ export function withTraits(vessel: Vessel, told: WineTraits, { at, entry }: Entr
  * withoutPH(known, 'acid', 7).voided.ph // => { event: 'acid', at: 7 }
  * ```
  */
-export function withoutPH(vessel: Vessel, event: 'malolactic' | 'acid' | 'blended', at: number): Vessel {
+export function withoutPH(
+  vessel: Vessel,
+  event: 'fermentation' | 'malolactic' | 'acid' | 'blended',
+  at: number,
+): Vessel {
   const { ph, ...others } = vessel;
   return ph === undefined ? vessel : { ...others, voided: { ...vessel.voided, ph: { event, at } } };
 }

@@ -80,6 +80,7 @@ const SCENES: readonly (readonly [key: string, ...messages: string[]])[] = [
   ['invite-how', 'invite'],
   ['added-it-none', 'added it'],
   ['picture-none', 'picture'],
+  ['volume-differs', 'T4 40 hl pH 3.5 free 20', 'T4 now 500 L free 25'],
 ];
 
 /** Doubts that only the whole line settles: each way to write the figure, in a whole line. */

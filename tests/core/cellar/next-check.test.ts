@@ -76,11 +76,11 @@ test.each<[string, Vessel, string]>([
   ['finished', vessel('tank 4', { ...free(24, 3), ...stage('finished') }), '33 usual'],
   ['must', vessel('tank 4', { ...free(24, 3), ...stage('must') }), 'never'],
   ['fermenting', vessel('barrel 17', stage('fermenting')), 'never'],
-  ['must with an addition', vessel('tank 4', { ...added(5), ...stage('must') }), '6 landing no dose'],
+  ['must with an addition', vessel('tank 4', { ...added(5), ...stage('must') }), 'never'],
   [
     'fermenting with an addition',
     vessel('tank 4', { ...free(2, 3), ...added(5), ...stage('fermenting') }),
-    '6 landing no dose',
+    'never',
   ],
   [
     'in malolactic, low as it should be',

@@ -36,7 +36,7 @@ const LOOKS: ReadonlySet<Intent> = new Set<Intent>(['dose', 'effect', 'solution'
 export async function permit(handled: Handled, here: Here, view: CellarView): Promise<Handled> {
   const { role } = here;
   if (role === 'keeper' || isEmergency(handled)) return handled;
-  const needed = await roleNeeded(handled, here, view);
+  const needed = roleNeeded(handled, here);
   if (role !== undefined && ROLES.indexOf(role) >= ROLES.indexOf(needed)) return handled;
   return role === 'guest' && isOnlyReckoned(handled) ? asGuestSees(handled) : refused(needed, here, view);
 }
@@ -45,7 +45,7 @@ function isEmergency({ understood }: Handled): boolean {
   return understood?.readings.some(({ intent }) => intent === 'emergency') === true;
 }
 
-async function roleNeeded(handled: Handled, here: Here, view: CellarView): Promise<Role> {
+function roleNeeded(handled: Handled, here: Here): Role {
   const { writes, errand, place, understood } = handled;
   const name = understood?.readings[0]?.command?.name;
   if (name !== undefined && KEEPERS_WORDS.has(name)) return 'keeper';
@@ -55,17 +55,12 @@ async function roleNeeded(handled: Handled, here: Here, view: CellarView): Promi
   // In a group another cellar is another one for all who are there.
   const isGroup = (here.message.addressed ?? 'direct') !== 'direct';
   if (place?.does === 'switch' && isGroup) return 'keeper';
-  const each = await Promise.all(writes.map((write) => roleForWrite(write, name, here, view)));
+  const each = writes.map(roleForWrite);
   const asked: Role = name === 'people' ? 'hand' : 'guest';
   return each.reduce((one, other) => (ROLES.indexOf(one) > ROLES.indexOf(other) ? one : other), asked);
 }
 
-async function roleForWrite(
-  write: Write,
-  name: Command['name'] | undefined,
-  { me }: Here,
-  view: CellarView,
-): Promise<Role> {
+function roleForWrite(write: Write): Role {
   if (write.kind === 'due') return 'hand';
   if (write.kind === 'keep' || write.kind === 'drop') {
     if (KEEPERS_KEYS.some((key) => write.key.startsWith(key))) return 'keeper';
@@ -74,11 +69,8 @@ async function roleForWrite(
   if (write.kind !== 'entry') return 'guest';
   const { entry } = write;
   if (entry.kind === 'vessel' && entry.event === 'forgotten') return 'keeper';
-  if (entry.kind !== 'correction') return 'hand';
-  // When somebody else’s sample was taken anybody may know; to strike it for another reason is a keeper’s.
-  const isMoved = name !== 'strike' && entry.reason === 'sampled before';
-  const struck = isMoved ? undefined : await view.entry(entry.corrects);
-  return struck !== undefined && struck.by !== me ? 'keeper' : 'hand';
+  // Any hand may strike any entry with a reason: both stay, under the names of who noted and who struck.
+  return 'hand';
 }
 
 /** Whether nothing was to be noted but what a dose was reckoned of. */

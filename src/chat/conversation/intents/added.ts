@@ -11,11 +11,10 @@ import { vesselText } from '../lines/vessel.ts';
 import { workingLines } from '../lines/working.ts';
 import { perLitre } from '../manner.ts';
 import type { Outcome, Turn } from '../outcome.ts';
-import { momentText } from '../../replies/moment-text.ts';
-import { tellingOf } from '../telling.ts';
 import { additiveOf, toAddedRequest } from '../to-requests.ts';
 import { whenOf } from '../when.ts';
 import { missing } from './missing.ts';
+import { whenIsUnclear } from './when-unclear.ts';
 import { notedAddition } from './noted-addition.ts';
 
 /**
@@ -24,8 +23,9 @@ import { notedAddition } from './noted-addition.ts';
  */
 export function answerAdded(reading: Reading, turn: Turn): Outcome {
   if (reading.asks.length > 0) return missing(reading, turn);
+  const unsaid = whenIsUnclear(reading, turn);
+  if (unsaid) return unsaid;
   const when = whenOf(reading, turn.here);
-  if (when.is === 'future' || when.is === 'no-such-day') return notYet(reading, when.at, when.is, turn);
   const answer = added(toAddedRequest(reading));
   if (isWorkedOut(reading)) return confirmed(reading, answer, turn);
   const addition = additionOf(reading, answer, turn.here);
@@ -70,11 +70,4 @@ function confirmed(reading: Reading, answer: AddedAnswer, turn: Turn): Outcome {
     ],
     buttons: buttonsFor(turn.ref, ['n', 'w']),
   };
-}
-
-function notYet(reading: Reading, at: number, key: 'future' | 'no-such-day', turn: Turn): Outcome {
-  const when = momentText(at, tellingOf(turn.here));
-  const values = { vessel: vesselText(reading), when, text: reading.when?.text ?? '' };
-  const first = line('first', `when-${key}`, values);
-  return { answer: null, inRound: [first], lines: [first], buttons: [] };
 }

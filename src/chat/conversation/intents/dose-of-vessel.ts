@@ -1,14 +1,18 @@
 import { landingOf } from '../../../core/cellar/landing-of.ts';
 import type { DoseAnswer } from '../../../core/dose/answer.ts';
 import type { Reading } from '../../reader/understood.ts';
+import { momentText } from '../../replies/moment-text.ts';
 import type { Line } from '../../replies/reply.ts';
+import { vesselName } from '../../replies/vessel-name.ts';
 import { planKey } from '../keys.ts';
 import { landedLines } from '../lines/landed.ts';
+import { line } from '../lines/line.ts';
 import { onItLines } from '../lines/on-it.ts';
 import type { Outcome, Turn } from '../outcome.ts';
 import { PLAN_ms, type Plan } from '../plan.ts';
 import { saidFields } from '../recall.ts';
 import { toBeWeighed } from '../to-be-weighed.ts';
+import { tellingOf } from '../telling.ts';
 import { whenOf } from '../when.ts';
 import { answerDose } from './dose.ts';
 import { dosedAlready } from './dosed-already.ts';
@@ -22,7 +26,7 @@ export function answerDoseOfVessel(reading: Reading, turn: Turn): Outcome {
   if (dosed) return dosed;
   const outcome = answerDose(reading, turn);
   const landed = landedAt(reading, turn);
-  const news = [...landed, ...onItLines(reading, turn.here)];
+  const news = [...emptyLines(reading, turn), ...landed, ...onItLines(reading, turn.here)];
   const isLanding = landed.length > 0 && saidFields(reading).target === undefined;
   return {
     ...outcome,
@@ -39,11 +43,20 @@ function afterFirst(lines: readonly Line[], news: readonly Line[]): Line[] {
   return [...lines.slice(0, place), ...news, ...lines.slice(place)];
 }
 
+/** That the vessel was down as empty: a slip of its name, or wine that nobody told of. */
+function emptyLines({ fields }: Reading, { here }: Turn): Line[] {
+  const vessel = fields.vessel === undefined ? undefined : here.vessels.get(fields.vessel);
+  if (vessel?.empty === undefined) return [];
+  const values = { vessel: vesselName(vessel.vessel), when: momentText(vessel.empty, tellingOf(here)) };
+  return [line('first', 'odd-empty', values)];
+}
+
 /** Where the additions before this sample landed. */
 function landedAt(reading: Reading, { here, manner }: Turn): Line[] {
   const { vessel: name, free_mg_L } = saidFields(reading);
   const vessel = name === undefined ? undefined : here.vessels.get(name);
-  if (vessel === undefined || free_mg_L === undefined || reading.noted?.includes('free_mg_L')) return [];
+  if (vessel === undefined || free_mg_L === undefined) return [];
+  if (reading.marks.conditional || reading.noted?.includes('free_mg_L')) return [];
   const landing = landingOf(vessel, { entry: here.nextEntry, at: whenOf(reading, here).at, free_mg_L });
   return landing ? landedLines(vessel.vessel, landing, manner) : [];
 }

@@ -10,6 +10,7 @@ import { factLines } from '../lines/facts.ts';
 import { landedLines } from '../lines/landed.ts';
 import { line } from '../lines/line.ts';
 import { notedAmount } from '../lines/noted-amount.ts';
+import { volumeDiffersLines } from '../lines/volume-differs.ts';
 import type { Outcome, Turn } from '../outcome.ts';
 import { whoText } from '../people.ts';
 import { saidFields } from '../recall.ts';
@@ -28,8 +29,9 @@ interface Dosed {
  */
 export function dosedAlready(reading: Reading, turn: Turn): Outcome | undefined {
   const { here } = turn;
-  if (reading.sampled === 'dose' || reading.marks.conditional) return undefined;
+  if (reading.sampled === 'dose') return undefined;
   const sample = whenOf(reading, here);
+  // One whole day after it, it counts no more.
   const dosed = lastDosed(reading, turn, Math.min(sample.at, here.message.at - DAY_ms));
   if (dosed === undefined) return undefined;
   const { free_mg_L } = saidFields(reading);
@@ -46,7 +48,7 @@ function lastDosed(reading: Reading, { here }: Turn, since: number): Dosed | und
   const all = vesselsIn(reading.fields).flatMap((name): Dosed[] => {
     const vessel = here.vessels.get(name);
     const addition = vessel?.additions.at(-1);
-    return vessel && addition && addition.at >= since ? [{ vessel, addition }] : [];
+    return vessel && addition && addition.at > since ? [{ vessel, addition }] : [];
   });
   return all.toSorted((a, b) => a.addition.at - b.addition.at).at(-1);
 }
@@ -62,7 +64,7 @@ function asked(
   return {
     answer: null,
     inRound: [dosedLine(dosed, 'dosed-in-round', turn)],
-    lines: [...first, ...factLines(reading, turn.manner)],
+    lines: [...first, ...volumeDiffersLines(reading, turn.manner), ...factLines(reading, turn.manner)],
     buttons: buttonsFor(turn.ref, does),
   };
 }
@@ -98,7 +100,7 @@ function landedToday(reading: Reading, dosed: Dosed, free_mg_L: number, turn: Tu
   return {
     answer: null,
     inRound: lines.slice(0, 1),
-    lines: [...lines, ...factLines(reading, manner)],
+    lines: [...lines, ...volumeDiffersLines(reading, manner), ...factLines(reading, manner)],
     buttons: buttonsFor(turn.ref, ['gd']),
     ...(landing && { isLanding: true as const }),
   };

@@ -55,8 +55,9 @@ function notedLine({ happening, at }: AdditionNote, { here, manner }: Pick<Turn,
 }
 
 /** When to measure; the day may lie behind, where the addition is noted late. */
-function nextLine({ at }: AdditionNote, { here }: Pick<Turn, 'here'>): Line {
-  const next = at + DAY_ms;
+function nextLine({ happening, at }: AdditionNote, { here }: Pick<Turn, 'here'>): Line {
+  const others = happening.vessels.flatMap((name) => here.vessels.get(name)?.additions.at(-1)?.at ?? []);
+  const next = Math.max(at, ...others) + DAY_ms;
   const telling = tellingOf(here);
   return next > here.message.at
     ? line('effect', 'noted-measure', { when: momentText(next, telling) })

@@ -1,4 +1,4 @@
-import type { OtherAddition } from '../../../core/cellar/entry.ts';
+import type { OtherAddition, VesselChange } from '../../../core/cellar/entry.ts';
 import type { Reading } from '../../reader/understood.ts';
 import { momentText } from '../../replies/moment-text.ts';
 import { vesselNames } from '../../replies/vessel-name.ts';
@@ -40,10 +40,13 @@ export function answerOtherAddition(reading: Reading, { here }: Turn): Outcome |
     text,
     when: momentText(when.at, tellingOf(here)),
   };
-  const first = line('first', 'noted-something-else', values);
+  const isAcid = reading.marks.acid === true;
+  const first = line('first', 'noted-something-else', { ...values, voids: isAcid ? 'ph' : 'none' });
+  const acid: VesselChange = { kind: 'vessel', event: 'acid', vessels };
   return {
     answer: null,
-    notes: [{ happening, at: when.at }],
+    // An acid, or what takes some away, leaves another pH.
+    notes: [{ happening, at: when.at }, ...(isAcid ? [{ happening: acid, at: when.at }] : [])],
     inRound: [first],
     lines: [first],
     buttons: entryButtons(here.nextEntry, ['u']),

@@ -7,6 +7,7 @@ import { factsOf } from '../lines/facts.ts';
 import { landedLines } from '../lines/landed.ts';
 import { line, listLine } from '../lines/line.ts';
 import { vesselText } from '../lines/vessel.ts';
+import { volumeDiffersLines } from '../lines/volume-differs.ts';
 import type { Outcome, Turn } from '../outcome.ts';
 import { tellingOf } from '../telling.ts';
 import { whenOf } from '../when.ts';
@@ -26,6 +27,7 @@ export function answerReading(reading: Reading, turn: Turn): Outcome {
     lines: [
       ...landed(reading, when.at, turn),
       ...kept,
+      ...volumeDiffersLines(reading, manner),
       ...(when.is === 'noon' ? [line('assumed', 'when-noon')] : []),
       ...assumedLines(reading, manner),
     ],

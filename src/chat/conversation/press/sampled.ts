@@ -58,7 +58,7 @@ async function notedEarlier(
   const { at } = here.message;
   return [
     {
-      happening: { kind: 'correction', vessels: entry.vessels, corrects, reason: 'sampled before' },
+      happening: { kind: 'correction', vessels: entry.vessels, corrects, reason: 'sampled-before' },
       at,
       key: `strike ${corrects}`,
     },

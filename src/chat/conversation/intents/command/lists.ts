@@ -2,6 +2,8 @@ import type { CellarView } from '../../../../core/cellar/cellar-store.ts';
 import { dueVessels, type DueVessel } from '../../../../core/cellar/due-vessels.ts';
 import { nextCheck } from '../../../../core/cellar/next-check.ts';
 import type { Vessel } from '../../../../core/cellar/vessel.ts';
+import { dayBounds } from '../../../../core/time/day-bounds.ts';
+import { localTimeOf } from '../../../../core/time/local-time-of.ts';
 import { dayText, momentText } from '../../../replies/moment-text.ts';
 import { numberText } from '../../../replies/number-text.ts';
 import type { Button, Line } from '../../../replies/reply.ts';
@@ -16,6 +18,7 @@ import { nameText } from '../../people.ts';
 import type { Handled } from '../../ports.ts';
 import { replying } from '../../replying.ts';
 import { tellingOf } from '../../telling.ts';
+import { zoneOf } from '../../zone.ts';
 
 /** So many lines of a list stand in one message; the others are counted. */
 const MOST_LINES = 40;
@@ -33,7 +36,9 @@ export async function listVessels(here: Here, view: CellarView): Promise<Handled
   const overdue = due.filter(({ check }) => check.at <= at);
   const coming = due.filter(({ check }) => check.at > at).toSorted((a, b) => a.check.at - b.check.at);
   const watched = [...overdue, ...coming].map(({ vessel }) => vessel);
-  const rest = vessels.filter((vessel) => !watched.includes(vessel));
+  const rest = vessels
+    .filter((vessel) => !watched.includes(vessel))
+    .toSorted((a, b) => a.vessel.localeCompare(b.vessel, 'en', { numeric: true }));
   const rows = [...watched, ...rest].map((vessel) => vesselLine(vessel, here));
   const head = line('first', 'vessels-head', { ...countOf(vessels.length), due: String(overdue.length) });
   return replying(here, { lines: [head, ...shortened(rows)] });
@@ -65,7 +70,10 @@ function vesselLine(vessel: Vessel, here: Here): Line {
 /** What is to be measured, the most urgent first. */
 export async function listDue(here: Here, view: CellarView): Promise<Handled> {
   const { at } = here.message;
-  const due = dueVessels(await view.vessels(), { at, settings: checkSettingsOf(here.settings) });
+  const zone = zoneOf(here.settings);
+  // Like the list in the morning: also what falls due later on the same day.
+  const { to } = dayBounds(localTimeOf(at, zone), zone);
+  const due = dueVessels(await view.vessels(), { at, until: to, settings: checkSettingsOf(here.settings) });
   if (due.length === 0) return replying(here, { lines: [line('first', 'due-none')] });
   return replying(here, { lines: dueLines(due, here) });
 }

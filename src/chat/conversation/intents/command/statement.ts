@@ -14,6 +14,7 @@ import { entryPart } from '../../lines/entry-part.ts';
 import { line } from '../../lines/line.ts';
 import type { Note } from '../../note.ts';
 import type { Outcome, Turn } from '../../outcome.ts';
+import { whenIsUnclear } from '../when-unclear.ts';
 import { tellingOf } from '../../telling.ts';
 import { vesselsIn } from '../../vessels-named.ts';
 import { whenOf } from '../../when.ts';
@@ -42,8 +43,9 @@ export function answerStatement(reading: Reading, turn: Turn): Outcome | undefin
   const event = command && EVENTS[command.name];
   if (command === undefined || event === undefined || vessels.length === 0) return undefined;
   const { here } = turn;
+  const unsaid = whenIsUnclear(reading, turn);
+  if (unsaid) return unsaid;
   const when = whenOf(reading, here);
-  if (when.is === 'future' || when.is === 'no-such-day') return notYet(reading, when.at, when.is, turn);
   if (event === 'forgotten' && !here.vessels.has(vessels[0] ?? '')) return unknown(vessels);
   const happening = changeOf(reading, command, event, here);
   const note: Note = { happening, at: when.at };
@@ -147,13 +149,6 @@ function oddOf(change: VesselChange, { here, manner }: Turn): Line[] {
       }),
     );
   return lines;
-}
-
-function notYet(reading: Reading, at: number, key: 'future' | 'no-such-day', { here }: Turn): Outcome {
-  const vessel = vesselNames(vesselsIn(reading.fields));
-  const values = { vessel, when: momentText(at, tellingOf(here)), text: reading.when?.text ?? '' };
-  const first = line('first', `when-${key}`, values);
-  return { answer: null, inRound: [first], lines: [first], buttons: [] };
 }
 
 function unknown(vessels: readonly string[]): Outcome {
