@@ -1,5 +1,5 @@
 import type { DatabaseSync, SQLInputValue, StatementSync } from 'node:sqlite';
-import { Kysely, SqliteDialect, type SqliteDatabase, type SqliteStatement } from 'kysely';
+import { Kysely, SqliteAdapter, SqliteDialect, type SqliteDatabase, type SqliteStatement } from 'kysely';
 import type { Tables } from '../sql/tables.ts';
 import { callSqlite } from './sqlite-fault.ts';
 
@@ -8,7 +8,17 @@ const MOST_STATEMENTS = 300;
 
 /** Kysely on a connection of `node:sqlite`, which stays its maker's to close. */
 export function createKysely(connection: DatabaseSync): Kysely<Tables> {
-  return new Kysely({ dialect: new SqliteDialect({ database: asKyselyWants(connection) }) });
+  return new Kysely({ dialect: new Dialect({ database: asKyselyWants(connection) }) });
+}
+
+/**
+ * Statements run to their end when they are called, and what belongs together takes turns by itself (`group-commit.ts`):
+ * a query need not wait for the ones that were asked before it.
+ */
+class Dialect extends SqliteDialect {
+  override createAdapter(): SqliteAdapter {
+    return Object.defineProperty(new SqliteAdapter(), 'supportsMultipleConnections', { value: true });
+  }
 }
 
 function asKyselyWants(connection: DatabaseSync): SqliteDatabase {
