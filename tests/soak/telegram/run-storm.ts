@@ -26,6 +26,7 @@ export interface StormCounts {
   readonly unanswered: number;
   readonly outOfOrder: number;
   readonly repeated: number;
+  /** Answers in messages whose receipt was lost. */
   readonly receiptsLost: number;
   readonly entries: number;
   readonly doubled: number;
@@ -103,16 +104,13 @@ export async function runStorm(file: string, { updates, chats, second_ms }: Stor
     ),
   );
   const answers = (): string[] =>
-    // Several that waited may have become one message.
-    api.delivered.flatMap(({ chat_id, text }) =>
-      Array.from(text.matchAll(/^Noted \d+: T\d+ (\d+) g/gm), ([, mass_g]) => `${chat_id} ${mass_g}`),
-    );
+    api.delivered.flatMap(({ chat_id, text }) => massesIn(text).map((mass_g) => `${chat_id} ${mass_g}`));
   await api.until(() => new Set(answers()).size >= expected.size);
   stopping.abort();
   await ended;
   const got = answers();
   const seen = new Set(got);
-  const sends = api.callsOf('sendMessage').length;
+  const lost = api.callsOf('sendMessage').filter((_, at) => storm[at] === 'receipt lost');
   const masses: string[] = [];
   for (const cellar of await store.cellars())
     for (const entry of await store.look(cellar, (view) => view.entries({})))
@@ -124,13 +122,18 @@ export async function runStorm(file: string, { updates, chats, second_ms }: Stor
     unanswered: [...expected].filter((one) => !seen.has(one)).length,
     outOfOrder: people.filter(({ id }) => !isInOrder(got, `${id} `)).length,
     repeated: got.length - seen.size,
-    receiptsLost: storm.slice(0, sends).filter((fault) => fault === 'receipt lost').length,
+    receiptsLost: lost.flatMap(({ text }) => massesIn(String(text))).length,
     entries: masses.length,
     doubled: masses.length - new Set(masses).size,
     left,
     broken: api.broken,
     logged: lines.join(''),
   };
+}
+
+/** What a message answers: several that waited may have become one. */
+function massesIn(text: string): string[] {
+  return Array.from(text.matchAll(/^Noted \d+: T\d+ (\d+) g/gm), ([, mass_g]) => mass_g ?? '');
 }
 
 /** Whether the answers in a chat come in the order of the messages; one that comes again comes at once. */
