@@ -2,6 +2,7 @@ import type { CellarStore, Write } from '../../core/cellar/cellar-store.ts';
 import type { Post } from '../../core/cellar/mailbox.ts';
 import { asideReply, faultReply } from '../../chat/conversation/fault-reply.ts';
 import { leftReply } from '../../chat/conversation/left-reply.ts';
+import type { Language } from '../../chat/reader/understood.ts';
 import type { Reply } from '../../chat/replies/reply.ts';
 import type { Say } from '../../chat/replies/say.ts';
 import type { Audit } from '../audit-workings.ts';
@@ -71,8 +72,10 @@ export function makeHandling(options: AnswerOptions): Handling {
       if (signal.aborted) return;
       let posts: Post[] = [];
       try {
-        const { answers } = await serve(arrival.message, ({ said }) => {
-          posts = toPosts(said, { ...arrival, to: arrival.message.id, now: clock.now() });
+        const { answers } = await serve(arrival.message, ({ said, errand }) => {
+          // Files are not handed over here yet, and silence would be taken for work.
+          const all = errand === undefined ? said : [...said, say(errandReply(arrival.message.language))];
+          posts = toPosts(all, { ...arrival, to: arrival.message.id, now: clock.now() });
           return [handled(arrival), ...posts.map(writePost)];
         });
         send(posts);
@@ -126,6 +129,12 @@ export function makeHandling(options: AnswerOptions): Handling {
 
   return { answer, leave, putAside };
 }
+
+const errandReply = (language: Language): Reply => ({
+  language,
+  lines: [{ room: 'first', key: 'errand-failed', values: {} }],
+  buttons: [],
+});
 
 const handled = ({ updateId }: Arrival, cause?: string): Write => ({
   kind: 'handled',
