@@ -5,6 +5,7 @@ import type { Here } from './here.ts';
 import { notedOf } from './to-be-weighed.ts';
 import { additiveOf } from './to-requests.ts';
 import { vesselsIn } from './vessels-named.ts';
+import { whenOf } from './when.ts';
 
 /** An addition as the log keeps it: what was said, what follows from it, what was planned, and the order it carries out. */
 export function additionOf(reading: Reading, answer: AddedAnswer, here: Here): Addition {
@@ -13,7 +14,10 @@ export function additionOf(reading: Reading, answer: AddedAnswer, here: Here): A
   const volume_L = reading.fields.volume_L ?? reading.assumed.volume_L;
   const { steps: _steps, ...amount } = answer;
   const plan = vessels.length === 1 ? here.plans.get(vessels[0] ?? '') : undefined;
-  const orders = vessels.length === 1 ? (here.vessels.get(vessels[0] ?? '')?.orders ?? []) : [];
+  const { at } = whenOf(reading, here);
+  const ordered = vessels.length === 1 ? (here.vessels.get(vessels[0] ?? '')?.orders ?? []) : [];
+  // What went in before it was ordered carries out nothing.
+  const orders = ordered.filter((one) => one.at <= at);
   const [order] = orders;
   const isOrdered = order !== undefined && orders.length === 1 && order.additive === additive?.id;
   const { chemical_lot, remark } = reading;

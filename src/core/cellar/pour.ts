@@ -6,7 +6,8 @@ import { withoutPH } from './with-traits.ts';
 import { withoutVolume, withVolume } from './with-volume.ts';
 
 /**
- * A vessel without its wine: what belongs to the vessel itself (capacity in litres, its usual additive) stays.
+ * A vessel without its wine: what belongs to the vessel itself (capacity in litres, its usual additive) stays, and so
+ * do its orders, which stay open until somebody says what went in.
  *
  * Range: any time.
  *
@@ -21,11 +22,12 @@ import { withoutVolume, withVolume } from './with-volume.ts';
  * ```
  */
 export function emptied(vessel: Vessel, at: number): Vessel {
-  const { capacity_L, usual, unwatched } = vessel;
+  const { capacity_L, usual, unwatched, orders } = vessel;
   return {
     ...freshVessel(vessel.vessel, { entry: vessel.last_entry, at: vessel.since }),
     last_at: vessel.last_at,
     empty: at,
+    orders,
     ...(capacity_L && { capacity_L }),
     ...(usual && { usual }),
     ...(unwatched && { unwatched }),

@@ -11,7 +11,7 @@ import { line } from '../lines/line.ts';
 import type { Handled } from '../ports.ts';
 import { replying } from '../replying.ts';
 import { tellingOf } from '../telling.ts';
-import { noteOnce } from './log-buttons.ts';
+import { notedBy, noteOnce } from './log-buttons.ts';
 
 /** A button of an entry of the log: undo it, carry out the order, be asked a day after the addition. */
 export async function pressEntry(
@@ -43,8 +43,9 @@ async function carryOut(entry: LoggedEntry, here: Here, view: CellarView): Promi
     here.vessels.get(name)?.orders.some((one) => one.entry === order),
   );
   const key = `done ${order}`;
-  const before = await view.entriesOfKeys(key);
-  if (!isOpen && before.length === 0) return replying(here, { lines: [line('first', 'order-gone', values)] });
+  const { standing } = await notedBy(key, view);
+  if (!isOpen && standing === undefined)
+    return replying(here, { lines: [line('first', 'order-gone', values)] });
   return noteOnce({ happening, at: here.message.at }, key, here, view);
 }
 

@@ -40,9 +40,10 @@ export async function noteDose(found: Remembered, here: Here, view: CellarView):
 /** "Note it" under an addition whose amount was worked out. */
 export async function noteWorkedOut(found: Remembered, here: Here, view: CellarView): Promise<Handled> {
   const { reading } = found;
-  const happening = additionOf(reading, added(toAddedRequest(reading)), here);
   // When it was told, not when the button was pressed.
-  const { at } = whenOf(reading, { ...here, message: { ...here.message, at: found.at } });
+  const then = { ...here, message: { ...here.message, at: found.at } };
+  const happening = additionOf(reading, added(toAddedRequest(reading)), then);
+  const { at } = whenOf(reading, then);
   return noteOnce({ happening, at }, buttonKey('note', found.chat, found.ref), here, view);
 }
 
@@ -53,16 +54,23 @@ export async function noteOnce(
   here: Here,
   view: CellarView,
 ): Promise<Handled> {
+  const { standing, next } = await notedBy(key, view);
+  if (standing) return alreadyNoted(standing, here);
+  const keyed = { ...note, key: next };
+  const manner = mannerOf(NO_READING, here.memory.decimalMark ?? '.', here);
+  return noted(notedAddition(keyed, { here, manner }), here);
+}
+
+/** What a button has noted that still holds, and the key of what it notes next: what was taken back may be noted anew. */
+export async function notedBy(
+  key: string,
+  view: CellarView,
+): Promise<{ readonly standing: LoggedEntry | undefined; readonly next: string }> {
   const before = (await view.entriesOfKeys(key)).filter(
     (one) => one.key === key || one.key.startsWith(`${key} `),
   );
   const standing = before.find(({ struck }) => struck === undefined);
-  if (standing) return alreadyNoted(standing, here);
-  // What was taken back may be noted anew.
-  const own = before.length === 0 ? key : `${key} ${before.length}`;
-  const keyed = { ...note, key: own };
-  const manner = mannerOf(NO_READING, here.memory.decimalMark ?? '.', here);
-  return noted(notedAddition(keyed, { here, manner }), here);
+  return { standing, next: before.length === 0 ? key : `${key} ${before.length}` };
 }
 
 const NO_READING: Reading = {
@@ -136,10 +144,10 @@ export async function orderDose(found: Remembered, here: Here, view: CellarView)
   const addition = doseAsAddition(found, here);
   if (addition === undefined) return replying(here, { lines: [line('first', 'old-button')] });
   const key = buttonKey('order', found.chat, found.ref);
-  const before = await view.entryOfKey(key);
-  if (before) return alreadyNoted(before, here);
+  const { standing, next } = await notedBy(key, view);
+  if (standing) return alreadyNoted(standing, here);
   const { kind: _kind, planned_mg_L: _mg, planned_free_mg_L: _free, order: _order, ...amount } = addition;
   const order: Order = { kind: 'order', ...amount };
   const manner = mannerOf(NO_READING, here.memory.decimalMark ?? '.', here);
-  return noted(notedOrder({ happening: order, at: here.message.at, key }, { here, manner }), here);
+  return noted(notedOrder({ happening: order, at: here.message.at, key: next }, { here, manner }), here);
 }
