@@ -13,6 +13,7 @@ import { withoutMentions } from '../reader/without-mentions.ts';
 import { arrive, type Here } from './here.ts';
 import { eventKey } from './keys.ts';
 import { greeting } from './note.ts';
+import { notedBefore, rememberingNoted } from './noted-before.ts';
 import type { Content, IncomingMessage, Handled } from './ports.ts';
 import { handlePress } from './press.ts';
 import { alreadyNoted } from './press/log-buttons.ts';
@@ -54,14 +55,17 @@ async function handleAddressed(here: Here, view: CellarView): Promise<Handled> {
   }
   const before = await view.entriesOfKeys(eventKey(message));
   // Delivered again: what it noted stands, and only what is asked is answered anew.
-  const fact = before.find(({ kind }) => kind !== 'reading' && kind !== 'vessel');
+  const fact = await notedBefore(before, here, view);
   if (fact) return alreadyNoted(fact, here);
   const done = { ...here, done: new Set(before.map(({ key }) => key)) };
   const handled = await permit(await handleContent(content, done, view), done, view);
   if (here.role === undefined) return { writes: [], replies: handled.replies };
   const notes = handled.writes.some(({ kind }) => kind === 'entry');
   const daily = notes ? await scheduleDaily(done, view) : [];
-  return greeted({ ...handled, writes: [...handled.writes, ...daily] }, done);
+  return greeted(
+    { ...handled, writes: [...handled.writes, ...daily, ...rememberingNoted(handled, here)] },
+    done,
+  );
 }
 
 /** Whoever writes for the first time is known from then on; whom nothing was kept of is not. */

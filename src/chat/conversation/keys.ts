@@ -54,6 +54,11 @@ export function eventKey({ chat, id }: { readonly chat: string; readonly id: str
   return `${JSON.stringify([chat, id])} `;
 }
 
+/** Which entry an event noted under another key than its own. */
+export function notedKey(event: { readonly chat: string; readonly id: string }): string {
+  return `noted ${eventKey(event)}`;
+}
+
 /** Something that is to be said in a chat: one of its kind and matter. */
 export function dueId(kind: 'daily' | 'remind', chat: string, of: string): string {
   return `${kind} ${JSON.stringify([chat, of])}`;
