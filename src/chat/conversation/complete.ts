@@ -60,6 +60,9 @@ export function complete(waiting: Reading, next: Partial<Reading>, settings: Set
       ...(next.volumeUnit && { volumeUnit: next.volumeUnit }),
       ...(next.containers !== undefined && { containers: next.containers }),
       ...(next.concentrationUnit && { concentrationUnit: next.concentrationUnit }),
+      ...(next.when && { when: next.when }),
+      ...(next.chemical_lot !== undefined && { chemical_lot: next.chemical_lot }),
+      ...(next.remark !== undefined && { remark: next.remark }),
     },
     settings,
   );
@@ -103,9 +106,16 @@ function withProblems(reading: Reading, { problems }: Reading): Reading {
   return problems.length === 0 ? reading : { ...reading, problems, asks: [] };
 }
 
+/** What a message says of a vessel that it names is kept, also where the same was said before. */
+function notedAnew(waiting: Reading, { fields }: Reading): Reading {
+  if (waiting.noted === undefined || (fields.vessel ?? fields.vessels) === undefined) return waiting;
+  return { ...waiting, noted: waiting.noted.filter((name) => fields[name] === undefined) };
+}
+
 /** The reading that waits with its answer; while the answer leaves in doubt what was, the problem stands. */
 export function completeWaiting(waiting: Waiting, next: Reading, settings: Settings): Reading {
-  const { doubt, reading } = waiting;
+  const { doubt } = waiting;
+  const reading = notedAnew(waiting.reading, next);
   const whole = ofAllVessels(reading, next);
   if (doubt === undefined) return withProblems(complete(reading, whole, settings), whole);
   if (!settles(waiting, next))
