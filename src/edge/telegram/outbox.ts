@@ -80,12 +80,14 @@ export function createOutbox(options: OutboxOptions): Outbox {
   const run = async (lane: Lane): Promise<void> => {
     for (;;) {
       const waited = await waitForChat(lane);
-      await gate.pass(signal);
+      const passed = await gate.pass(signal);
       const [first] = lane.posts;
       if (first === undefined || signal.aborted) break;
       const parcel = waited ? mergePosts(first, lane.posts) : { posts: [first], body: first.body };
-      windowOf(lane.chat).note(clock.now());
+      const inChat = windowOf(lane.chat).note(clock.now());
       const sent = await send({ chat: lane.chat, body: parcel.body });
+      passed.arrived();
+      inChat.arrived(clock.now());
       if (sent.kind === 'sent') meter.sent();
       else if (!signal.aborted) meter.refused(sent.kind);
       await react(lane, parcel, sent);
