@@ -1149,6 +1149,13 @@ picture-none =
 stranger = This bot is for invited people. If you have a code, send: join and the code
 too-fast = Too many messages at once: I pass over yours for a minute. Then send again what I did not answer.
 
+command-today = What was noted today
+command-due = Vessels to measure
+command-vessels = All vessels
+command-open = Orders not done yet
+command-settings = What is usual here, and how to change it
+command-help = How to use me
+
 ## Files: export and import
 
 export-entry = No.

@@ -13,6 +13,11 @@ export interface Config {
   readonly dataFile: string;
   /** Where the server of health and figures listens, and of the webhook; absent: there is none. */
   readonly port?: number;
+  /**
+   * The people who may begin cellars, by the numbers that the platform has for them; others need an invitation. Absent:
+   * everybody may, as a stranger's private chat is a cellar of its own and sees nothing of any other.
+   */
+  readonly allow?: readonly number[];
   /** Where the platform brings updates to; absent: they are polled. */
   readonly webhook?: { readonly url: string; readonly secret?: string };
 }
@@ -25,6 +30,7 @@ const NAMES = [
   'WEBHOOK_URL',
   'WEBHOOK_SECRET',
   'PORT',
+  'ALLOW',
 ] as const;
 /** Where a webhook is served unless it is said. */
 const USUAL_PORT = 8080;
@@ -50,7 +56,7 @@ export async function readConfig(environment: Environment): Promise<Config> {
   const { VARIABLES } = await import('./variables.ts');
   const read = VARIABLES.safeParse(Object.fromEntries(set));
   if (!read.success) throw new OperatorError(read.error.issues.map((issue) => issue.message).join('\n'));
-  const { BOT_TOKEN, BOT_API_ROOT = USUAL.botApiRoot, WEBHOOK_URL, WEBHOOK_SECRET } = read.data;
+  const { BOT_TOKEN, BOT_API_ROOT = USUAL.botApiRoot, WEBHOOK_URL, WEBHOOK_SECRET, ALLOW } = read.data;
   const { LOG_LEVEL = USUAL.logLevel, DATA_FILE = USUAL.dataFile } = read.data;
   const port = read.data.PORT ?? (WEBHOOK_URL === undefined ? undefined : USUAL_PORT);
   return {
@@ -59,8 +65,11 @@ export async function readConfig(environment: Environment): Promise<Config> {
     logLevel: LOG_LEVEL,
     dataFile: DATA_FILE,
     ...(port !== undefined && { port: Number(port) }),
+    ...(ALLOW !== undefined && ALLOW !== 'open' && { allow: ALLOW === 'invited' ? [] : idsIn(ALLOW) }),
     ...(WEBHOOK_URL !== undefined && {
       webhook: { url: WEBHOOK_URL, ...(WEBHOOK_SECRET !== undefined && { secret: WEBHOOK_SECRET }) },
     }),
   };
 }
+
+const idsIn = (text: string): number[] => text.split(',').map(Number);

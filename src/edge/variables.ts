@@ -38,6 +38,13 @@ export const VARIABLES = z.object({
     .string()
     .regex(/^[\w-]{1,256}$/, 'WEBHOOK_SECRET must be 1 to 256 letters, digits, _ or -, or be left out.')
     .optional(),
+  ALLOW: z
+    .string()
+    .regex(
+      /^(open|invited|\s*\d{1,15}\s*(,\s*\d{1,15}\s*)*)$/,
+      'ALLOW must be open, invited, or Telegram user ids with commas between, or be left out.',
+    )
+    .optional(),
   PORT: z
     .string()
     .refine(

@@ -120,6 +120,12 @@ export interface SentenceValues {
   'choice-volume_L': 'value';
   'claim-taken': 'vessel' | 'when' | 'who';
   claimed: 'until' | 'vessel';
+  'command-due': never;
+  'command-help': never;
+  'command-open': never;
+  'command-settings': never;
+  'command-today': never;
+  'command-vessels': never;
   'condition-red': 'amount' | 'count' | 'kind' | 'limit' | 'red' | 'unit';
   'condition-stage': never;
   corrected: never;

@@ -29,6 +29,9 @@ export interface Door {
   ) => Promise<{ readonly chat: string; readonly cellars?: readonly CellarPlace[] }>;
 }
 
+/** Whether somebody was let in: who was not is answered outside of all cellars. */
+export const isInside = ({ message }: Admitted): boolean => message.cellar !== CHATS;
+
 /** What a door needs. */
 export interface DoorOptions {
   readonly store: Pick<CellarStore, 'look'>;

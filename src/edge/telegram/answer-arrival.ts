@@ -2,18 +2,20 @@ import type { CellarStore, Write } from '../../core/cellar/cellar-store.ts';
 import type { Post } from '../../core/cellar/mailbox.ts';
 import { asideReply, faultReply } from '../../chat/conversation/fault-reply.ts';
 import { leftReply } from '../../chat/conversation/left-reply.ts';
-import type { Language } from '../../chat/reader/understood.ts';
+import type { Errand, IncomingMessage } from '../../chat/conversation/ports.ts';
 import type { Reply } from '../../chat/replies/reply.ts';
-import type { Say } from '../../chat/replies/say.ts';
+import { joinReply } from '../../chat/conversation/join-reply.ts';
+import type { Said, Say } from '../../chat/replies/say.ts';
 import type { Audit } from '../audit-workings.ts';
 import type { Clock } from '../clock.ts';
 import { NO_METER, type Meter } from '../http/meter.ts';
 import type { Log } from '../logging.ts';
 import type { ServeTurn } from '../serve-message.ts';
 import { StoreError } from '../store/store-error.ts';
+import type { Arrival } from './arrival.ts';
+import type { CarryFiles } from './carry-files.ts';
 import { CHANNEL } from './channel.ts';
 import type { Handling } from './inbox.ts';
-import type { Arrival } from './to-message.ts';
 import { toPosts } from './to-posts.ts';
 
 /** What answering needs. */
@@ -27,6 +29,7 @@ export interface AnswerOptions {
   readonly send: (posts: readonly Post[]) => void;
   /** Sends past the store, where that one fails. One try; never rejects. */
   readonly sendNow: (posts: readonly Post[]) => Promise<void>;
+  readonly files: CarryFiles;
   /** Ends the waiting mark on a tapped button. Never rejects. */
   readonly tellTapSeen: (tapId: string) => Promise<void>;
   readonly meter?: Meter;
@@ -56,6 +59,7 @@ export function makeHandling(options: AnswerOptions): Handling {
     audit,
     send,
     sendNow,
+    files,
     tellTapSeen,
     clock,
     log,
@@ -65,6 +69,7 @@ export function makeHandling(options: AnswerOptions): Handling {
 
   const answer = async (arrival: Arrival): Promise<void> => {
     if (arrival.tapId !== undefined) void tellTapSeen(arrival.tapId);
+    if (arrival.isJoin) return end([arrival], [say(joinReply(arrival.message.language))]);
     const begun = performance.now();
     let failure: unknown;
     for (const wait_ms of [0, ...TRY_WAITS_MS]) {
@@ -72,16 +77,20 @@ export function makeHandling(options: AnswerOptions): Handling {
       if (signal.aborted) return;
       let posts: Post[] = [];
       try {
-        const { answers } = await serve(arrival.message, ({ said, errand }) => {
-          // Files are not handed over here yet, and silence would be taken for work.
-          const all = errand === undefined ? said : [...said, say(errandReply(arrival.message.language))];
-          posts = toPosts(all, { ...arrival, to: arrival.message.id, now: clock.now() });
-          return [handled(arrival), ...posts.map(writePost)];
+        const message = arrival.file === undefined ? arrival.message : await files.read(arrival);
+        const {
+          answers,
+          errand,
+          message: handledIn,
+        } = await serve(message, (served) => {
+          posts = toPosts(served.said, { spot: arrival, to: message.id, now: clock.now() });
+          // With an errand it is handled when that is done: should the process end before, it is done once more.
+          return [...(served.errand === undefined ? [handled(arrival)] : []), ...posts.map(writePost)];
         });
         send(posts);
-        meter.handled('answered', (performance.now() - begun) / 1000);
         audit?.(answers);
-        return;
+        if (errand !== undefined) return await runErrand(arrival, errand, handledIn ?? message);
+        return meter.handled('answered', (performance.now() - begun) / 1000);
       } catch (error) {
         failure = error;
       }
@@ -89,29 +98,44 @@ export function makeHandling(options: AnswerOptions): Handling {
     await putAside(arrival, failure);
   };
 
+  /** Off the turn, as it takes long. At a stop it is left, and done anew by the next process. */
+  const runErrand = async (arrival: Arrival, errand: Errand, message: IncomingMessage): Promise<void> => {
+    const begun = performance.now();
+    const said = await Promise.race([files.run(arrival, errand, message), aborted(signal)]);
+    if (said === undefined) return;
+    await end([arrival], said);
+    meter.handled('answered', (performance.now() - begun) / 1000);
+  };
+
   const putAside = async (arrival: Arrival, cause: unknown): Promise<void> => {
     log.error({ err: cause, update: arrival.updateId }, 'a message could not be answered');
     const { language } = arrival.message;
     const reply = cause instanceof StoreError ? faultReply(language, true) : asideReply(language);
     meter.handled('aside', 0);
-    await end([arrival], reply, String(cause).slice(0, LONGEST_CAUSE));
+    await end([arrival], sayTo([arrival], reply), String(cause).slice(0, LONGEST_CAUSE));
   };
 
   const leave: Handling['leave'] = async (arrivals) => {
     log.warn({ left: arrivals.length }, 'messages of long ago are left unread');
     for (const _ of arrivals) meter.handled('left', 0);
-    await end(arrivals, leftReply(arrivals[0].message.language, arrivals.length));
+    const meant = arrivals.filter(isForUs);
+    await end(arrivals, sayTo(arrivals, leftReply(arrivals[0].message.language, meant.length)));
   };
 
-  /** Ends what is not answered as it should be, and says so. */
+  /** Nothing is said of what was not for us. */
+  const sayTo = (arrivals: readonly Arrival[], reply: Reply): Said[] =>
+    arrivals.some(isForUs) ? [say(reply)] : [];
+
+  /** Ends what is not answered by its turn, and says so. */
   const end = async (
     arrivals: readonly [Arrival, ...Arrival[]],
-    reply: Reply,
+    toSay: readonly Said[],
     cause?: string,
   ): Promise<void> => {
-    const [{ chatId, message }] = arrivals;
-    const posts = toPosts([say(reply)], { chatId, to: `${message.id} ended`, now: clock.now() });
-    const done = arrivals.map((arrival) => handled(arrival, cause));
+    const [arrival] = arrivals;
+    const { message } = arrival;
+    const posts = toPosts(toSay, { spot: arrival, to: `${message.id} ended`, now: clock.now() });
+    const done = arrivals.map((one) => handled(one, cause));
     for (let failures = 0; !signal.aborted; failures += 1) {
       // What was sent past the store is not sent a second time.
       const said = failures === 0 ? posts : [];
@@ -130,11 +154,13 @@ export function makeHandling(options: AnswerOptions): Handling {
   return { answer, leave, putAside };
 }
 
-const errandReply = (language: Language): Reply => ({
-  language,
-  lines: [{ room: 'first', key: 'errand-failed', values: {} }],
-  buttons: [],
-});
+const isForUs = ({ message, isJoin }: Arrival): boolean => message.addressed !== 'overheard' && !isJoin;
+
+const aborted = (signal: AbortSignal): Promise<undefined> =>
+  new Promise((resolve) => {
+    if (signal.aborted) resolve(undefined);
+    else signal.addEventListener('abort', () => resolve(undefined), { once: true });
+  });
 
 const handled = ({ updateId }: Arrival, cause?: string): Write => ({
   kind: 'handled',

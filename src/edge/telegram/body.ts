@@ -2,6 +2,10 @@
 export interface Body {
   readonly method: string;
   readonly params: Readonly<Record<string, unknown>>;
+  /** The event to which this is the whole first answer, so that a correction finds it. */
+  readonly answers?: string;
+  /** It takes the place of what answered that event, where that is known. */
+  readonly isCorrection?: true;
 }
 
 /** What is sent, out of the text in which it is kept. */

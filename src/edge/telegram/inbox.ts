@@ -3,13 +3,20 @@ import type { Clock } from '../clock.ts';
 import { NO_METER, type Depth, type Meter } from '../http/meter.ts';
 import { CHANNEL } from './channel.ts';
 import { createChatQueues } from './chat-queues.ts';
-import { toMessage, type Arrival } from './to-message.ts';
-import type { TelegramUpdate } from './update.ts';
+import type { Arrival } from './arrival.ts';
+import type { Me } from './me.ts';
+import { toMessage } from './to-message.ts';
+import type { TelegramInlineQuery, TelegramUpdate } from './update.ts';
 
 /** What receiving needs. */
 export interface InboxOptions {
   readonly store: Pick<Mailbox, 'receive' | 'waiting' | 'countTry'>;
   readonly handling: Handling;
+  readonly me: Me;
+  /** Told that a group goes by another name; resolves when its cellar has gone with it. */
+  readonly onMoved?: (from: number, to: number) => Promise<void>;
+  /** Told what is typed behind our name: it is answered at once or never, and nothing of it is kept. */
+  readonly onTyped?: (query: TelegramInlineQuery) => void;
   readonly clock: Clock;
   readonly meter?: Meter;
   /** Aborted when there is no time left: what is not handled stays in the store. */
@@ -43,7 +50,8 @@ const MOST_TRIES = 4;
 const STALE_MS = 12 * 60 * 60 * 1000;
 
 /** Makes an inbox. */
-export function createInbox({ store, handling, clock, meter = NO_METER, signal }: InboxOptions): Inbox {
+export function createInbox(options: InboxOptions): Inbox {
+  const { store, handling, me, onMoved, onTyped, clock, meter = NO_METER, signal } = options;
   const isStale = ({ message }: Arrival): boolean => message.at < clock.now() - STALE_MS;
   const queues = createChatQueues<Arrival>(async (queue) => {
     if (signal.aborted) return 0;
@@ -66,9 +74,12 @@ export function createInbox({ store, handling, clock, meter = NO_METER, signal }
   return {
     receive: async (updates) => {
       const received_at = clock.now();
+      // Before anything else of the group is handled; what was done of it before does no harm.
+      for (const [from, to] of updates.flatMap(moveOf)) await onMoved?.(from, to);
+      for (const { inline_query: query } of updates) if (query !== undefined) onTyped?.(query);
       const known = new Map<number, Arrival>();
       const arrived = updates.flatMap((update) => {
-        const arrival = toMessage(update, received_at);
+        const arrival = toMessage(update, { received_at, me });
         // What needs no answer needs no memory: should it come again, it needs none again.
         if (arrival === undefined) return [];
         known.set(update.update_id, arrival);
@@ -84,7 +95,10 @@ export function createInbox({ store, handling, clock, meter = NO_METER, signal }
     recover: async () => {
       const waiting = await store.waiting(CHANNEL);
       const left = waiting.flatMap((one) => {
-        const arrival = toMessage(JSON.parse(one.body) as TelegramUpdate, one.received_at);
+        const arrival = toMessage(JSON.parse(one.body) as TelegramUpdate, {
+          received_at: one.received_at,
+          me,
+        });
         return arrival === undefined ? [] : [{ one, arrival }];
       });
       for (const { one, arrival } of left)
@@ -101,4 +115,12 @@ export function createInbox({ store, handling, clock, meter = NO_METER, signal }
     depth: queues.depth,
     idle: () => queues.idle(),
   };
+}
+
+/** The old and the new name of a group, told in the old chat and in the new one. */
+function moveOf({ message }: TelegramUpdate): (readonly [from: number, to: number])[] {
+  if (message === undefined) return [];
+  const { chat, migrate_to_chat_id: to, migrate_from_chat_id: from } = message;
+  if (to !== undefined) return [[chat.id, to]];
+  return from === undefined ? [] : [[from, chat.id]];
 }

@@ -11,7 +11,10 @@ export interface LeanFetch {
 export interface LeanRequest {
   readonly method?: string;
   readonly headers?: Record<string, string>;
-  readonly body?: string;
+  /** A text, or what comes in pieces: a file. */
+  readonly body?: string | AsyncIterable<Uint8Array>;
+  /** More of an answer than so many bytes is not read: then it has no bytes. */
+  readonly longest_bytes?: number;
   /** Any thing with the shape of an AbortSignal: the client brings one of its own, which Node's fetch refuses. */
   readonly signal?: Pick<AbortSignal, 'aborted' | 'addEventListener' | 'removeEventListener'>;
 }
@@ -20,6 +23,8 @@ export interface LeanRequest {
 export interface LeanResponse {
   readonly status: number;
   json(): Promise<unknown>;
+  /** Undefined where there are more than were asked for. */
+  bytes(): Uint8Array | undefined;
 }
 
 /** The Bot API was asked and did not answer in its own words. Holds no URL, as the URL holds the token. */
@@ -54,7 +59,7 @@ export function createLeanFetch(): LeanFetch {
 
   const call = (url: URL, init: LeanRequest, mayRepeat: boolean): Promise<LeanResponse> =>
     new Promise((resolve, reject) => {
-      const { signal, body, method = 'GET', headers = {} } = init;
+      const { signal, body, method = 'GET', headers = {}, longest_bytes = Infinity } = init;
       if (signal?.aborted === true) return reject(new NoAnswer('the call was given up'));
       const options: RequestOptions = { method, headers, agent: agentOf(url.protocol) };
       const request = moduleOf(url.protocol).request(url, options);
@@ -69,14 +74,16 @@ export function createLeanFetch(): LeanFetch {
         settle();
         // Most likely the other side closed a waiting connection just as we took it.
         const stale = request.reusedSocket && error.code === 'ECONNRESET';
-        if (stale && mayRepeat) resolve(call(url, init, false));
+        // What came in pieces is spent.
+        if (stale && mayRepeat && !isInPieces(body)) resolve(call(url, init, false));
         else reject(error);
       });
       request.on('response', (response) => {
-        readWhole(response).then(
-          (text) => {
+        readWhole(response, longest_bytes).then(
+          (whole) => {
             settle();
-            resolve({ status: response.statusCode ?? 0, json: async () => parse(text, response.statusCode) });
+            const { statusCode: status = 0 } = response;
+            resolve({ status, bytes: () => whole, json: async () => parse(whole, status) });
           },
           (error: Error) => {
             settle();
@@ -84,7 +91,8 @@ export function createLeanFetch(): LeanFetch {
           },
         );
       });
-      request.end(body);
+      if (isInPieces(body)) sendPieces(body, request).catch((error: Error) => request.destroy(error));
+      else request.end(body);
     });
 
   return Object.assign((url: string, init: LeanRequest) => call(new URL(url), init, true), {
@@ -95,17 +103,39 @@ export function createLeanFetch(): LeanFetch {
   });
 }
 
-const readWhole = (response: HttpResponse): Promise<string> =>
+const isInPieces = (body: LeanRequest['body']): body is AsyncIterable<Uint8Array> => typeof body === 'object';
+
+async function sendPieces(pieces: AsyncIterable<Uint8Array>, request: ClientRequest): Promise<void> {
+  for await (const piece of pieces) {
+    const isTaken = request.write(piece);
+    if (!isTaken && !request.destroyed)
+      await new Promise<void>((resolve) => {
+        request.once('drain', resolve);
+        request.once('close', resolve);
+      });
+    if (request.destroyed) return;
+  }
+  request.end();
+}
+
+/** The bytes of an answer; undefined where there are more than `longest_bytes`: then the rest stays unread. */
+const readWhole = (response: HttpResponse, longest_bytes: number): Promise<Buffer | undefined> =>
   new Promise((resolve, reject) => {
     const parts: Buffer[] = [];
-    response.on('data', (part: Buffer) => parts.push(part));
-    response.on('end', () => resolve(Buffer.concat(parts).toString('utf8')));
+    let length = 0;
+    response.on('data', (part: Buffer) => {
+      length += part.length;
+      if (length <= longest_bytes) return void parts.push(part);
+      resolve(undefined);
+      response.destroy();
+    });
+    response.on('end', () => resolve(Buffer.concat(parts)));
     response.on('error', reject);
   });
 
-const parse = (text: string, status: number | undefined): unknown => {
+const parse = (whole: Buffer | undefined, status: number): unknown => {
   try {
-    return JSON.parse(text);
+    return JSON.parse(whole?.toString('utf8') ?? '');
   } catch (cause) {
     throw new NoAnswer(`status ${status} with a body that is not JSON`, { cause });
   }

@@ -31,8 +31,9 @@ export function mergePosts(first: Post, waiting: readonly Post[]): Parcel {
 }
 
 function plainTextOf({ body }: Post): string | undefined {
-  const { method, params } = readBody(body);
+  const { method, params, isCorrection } = readBody(body);
   const { text } = params;
+  if (isCorrection) return undefined;
   const isPlain = Object.keys(params).every((name) => name === 'text' || name === 'link_preview_options');
   return method === 'sendMessage' && isPlain && typeof text === 'string' ? text : undefined;
 }

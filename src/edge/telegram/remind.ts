@@ -26,12 +26,14 @@ export function remind({ serveDue, send, ...options }: RemindOptions): Promise<v
   return runReminders({
     ...options,
     say: async (due) => {
-      const chatId = chatIdOf(due.chat);
       // A chat of another platform is for whoever serves that one.
-      if (chatId === undefined) return;
+      if (chatIdOf(due.chat) === undefined) return;
       let posts: Post[] = [];
-      await serveDue(due, clock.now(), ({ said }) => {
-        posts = toPosts(said, { chatId, to: `due ${due.cellar} ${due.id} ${due.at}`, now: clock.now() });
+      await serveDue(due, clock.now(), ({ said, chat }) => {
+        const chatId = chatIdOf(chat);
+        if (chatId === undefined) return [];
+        const to = `due ${due.cellar} ${due.id} ${due.at}`;
+        posts = toPosts(said, { spot: { chatId }, to, now: clock.now() });
         return posts.map((post) => ({ kind: 'post', post }));
       });
       send(posts);

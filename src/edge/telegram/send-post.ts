@@ -3,6 +3,7 @@ import type { Api } from 'grammy';
 import { readBody } from './body.ts';
 import { failureOf, type Failure } from './failure.ts';
 import { clientSignal } from './platform.ts';
+import type { Receipts } from './receipts.ts';
 
 /** How a sending ended. */
 export type Sent =
@@ -23,23 +24,50 @@ type Call = (params: object, signal: ReturnType<typeof clientSignal>) => Promise
 /** Refusals that say there is nothing left to do. */
 const IS_DONE = /message is not modified|query is too old|query ID is invalid/i;
 
+/** What sending needs. */
+export interface SendingOptions {
+  readonly api: Api;
+  readonly receipts: Receipts;
+  readonly signal: AbortSignal;
+}
+
 /** Sends what a post holds, once. Never rejects. */
 export async function sendPost(
   { chat, body }: { readonly chat: string; readonly body: string },
-  { api, signal }: { readonly api: Api; readonly signal: AbortSignal },
+  { api, receipts, signal }: SendingOptions,
 ): Promise<Sent> {
+  const { method, params, answers, isCorrection } = readBody(body);
+  const call = async (name: string, given: object): Promise<unknown> => {
+    const one = (api.raw as unknown as Record<string, Call>)[name];
+    if (one === undefined) throw new TypeError(`no method of the platform: ${name}`);
+    return one({ chat_id: Number(chat), ...given }, clientSignal(signal));
+  };
+  const known = isCorrection && answers !== undefined ? receipts.find(chat, answers) : undefined;
+  if (known !== undefined) {
+    try {
+      const { text, link_preview_options, reply_markup } = params;
+      await call('editMessageText', { message_id: known, text, link_preview_options, reply_markup });
+      return { kind: 'sent' };
+    } catch (error) {
+      const edited = judgeSending(failureOf(error));
+      // What cannot be edited any more, as somebody has deleted it, is said anew.
+      if (edited.kind !== 'refused') return edited;
+    }
+  }
   try {
-    const { method, params } = readBody(body);
-    const call = (api.raw as unknown as Record<string, Call>)[method];
-    if (call === undefined) throw new TypeError(`no method of the platform: ${method}`);
-    await call({ chat_id: Number(chat), ...params }, clientSignal(signal));
+    const receipt = await call(method, params);
+    if (answers !== undefined) receipts.note(chat, answers, messageIdOf(receipt));
     return { kind: 'sent' };
   } catch (error) {
-    return judge(failureOf(error));
+    return judgeSending(failureOf(error));
   }
 }
 
-function judge(failure: Failure): Sent {
+const messageIdOf = (receipt: unknown): number | undefined =>
+  (receipt as { readonly message_id?: number } | undefined)?.message_id;
+
+/** What a failure means for what was to be sent. */
+export function judgeSending(failure: Failure): Sent {
   if (failure.kind === 'unreached') return { kind: 'failed', failure };
   if (failure.kind === 'fault') return { kind: 'refused', failure };
   const { code, reason, retryAfter_s, movedTo } = failure;

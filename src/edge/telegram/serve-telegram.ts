@@ -6,17 +6,20 @@ import type { Log } from '../logging.ts';
 import type { WakeUp } from '../reminders/wake-up.ts';
 import type { ServeDue } from '../serve-due.ts';
 import type { ServeTurn } from '../serve-message.ts';
+import type { TypedWork } from './answer-typed.ts';
 import { createBackOff } from './back-off.ts';
 import { CHANNEL } from './channel.ts';
 import { confirmOffset } from './confirm-offset.ts';
 import { greet } from './greet.ts';
 import { joinMail } from './join-mail.ts';
+import type { FileWork } from './make-carry-files.ts';
 import { openDoor, type DoorAddress } from './open-door.ts';
 import { USUAL_LIMITS, type Limits } from './pace.ts';
 import { openPlatform } from './platform.ts';
 import { poll } from './poll.ts';
 import { pruneNowAndThen } from './prune-now-and-then.ts';
 import { remind } from './remind.ts';
+import { showCommands } from './show-commands.ts';
 
 /** Everything that serving Telegram needs, handed in. */
 export interface TelegramOptions {
@@ -37,6 +40,12 @@ export interface TelegramOptions {
   /** Aborted when the program is asked to stop. */
   readonly signal: AbortSignal;
   readonly limits?: Limits;
+  /** Absent: files are neither read nor sent. */
+  readonly fileWork?: FileWork;
+  /** Absent: nothing is answered outside the chats that the bot is in. */
+  readonly typedWork?: TypedWork;
+  /** Takes the cellar of a group along when that gets another name. */
+  readonly migrateChat?: (from: string, to: string) => Promise<void>;
   readonly times?: Partial<Times>;
 }
 
@@ -61,7 +70,7 @@ const USUAL_TIMES: Times = {
 };
 
 /**
- * Serves private chats until the signal is aborted, then finishes what is in hand; what there is no time for stays in
+ * Serves chats until the signal is aborted, then finishes what is in hand; what there is no time for stays in
  * the store.
  *
  * @throws OperatorError when the platform does not accept the token, or the port cannot be had.
@@ -73,13 +82,15 @@ export async function serveTelegram(options: TelegramOptions): Promise<void> {
   const platform = openPlatform({ token, root, ...times });
   const giveUp = new AbortController();
   const door = await openDoor({ ...options, platform });
-  const mail = joinMail({ ...options, platform, limits, meter: door.meter, signal: giveUp.signal });
-  const { inbox, outbox } = mail;
   const background: Promise<void>[] = [];
-  door.watch(mail);
   try {
     const backOff = createBackOff({ root, clock, log, tell, signal });
-    if (!(await greet(platform, { backOff, log, tell, signal }))) return;
+    const me = await greet(platform, { backOff, log, tell, signal });
+    if (me === undefined) return;
+    const mail = joinMail({ ...options, me, platform, limits, meter: door.meter, signal: giveUp.signal });
+    const { inbox, outbox } = mail;
+    door.watch(mail);
+    void showCommands({ ...options, platform });
     background.push(pruneNowAndThen({ store, clock, log, signal }));
     outbox.add(await store.posts(CHANNEL));
     await inbox.recover();

@@ -2,11 +2,16 @@ import type { Who } from '../../chat/conversation/ports.ts';
 import { shownName } from '../shown-name.ts';
 import type { TelegramChat, TelegramUser } from './update.ts';
 
-/** Whether the bot speaks in this chat at all: in private chats only, it stays silent elsewhere. */
-export const isServed = (chat: TelegramChat): boolean => chat.type === 'private';
+const SERVED: readonly string[] = ['private', 'group', 'supergroup'];
 
-/** The cellar that a chat belongs to: for now each chat is a cellar of its own. */
-export const cellarOf = (chatId: number): string => `telegram:${chatId}`;
+/** Whether the bot speaks in this chat at all: in a channel nobody is spoken to. */
+export const isServed = (chat: TelegramChat): boolean => SERVED.includes(chat.type);
+
+/** The name by which the conversation knows a chat, unlike those of any other platform. */
+export const chatNameOf = (chatId: number): string => `telegram:${chatId}`;
+
+/** The name by which the conversation knows a person. */
+export const personNameOf = (userId: number): string => `telegram:${userId}`;
 
 const CHAT = /^telegram:(-?\d+)$/;
 
@@ -16,13 +21,14 @@ export function chatIdOf(chat: string): number | undefined {
   return digits === undefined ? undefined : Number(digits);
 }
 
-/** The names by which the conversation knows a chat and a person, unlike those of any other platform. */
+/** The names by which the conversation knows a chat and a person in it. */
 export function whoOf(chat: TelegramChat, from: TelegramUser): Who {
   const name = shownName(from.first_name);
   return {
-    cellar: cellarOf(chat.id),
-    chat: `telegram:${chat.id}`,
-    person: `telegram:${from.id}`,
+    // A chat is a cellar of its own until somebody brings it into another.
+    cellar: chatNameOf(chat.id),
+    chat: chatNameOf(chat.id),
+    person: personNameOf(from.id),
     ...(name !== undefined && { name }),
   };
 }

@@ -20,6 +20,13 @@ const PARAMS_OF: Readonly<Record<string, string>> = {
   answerCallbackQuery: 'AnswerCallbackQueryParams',
   setWebhook: 'SetWebhookParams',
   deleteWebhook: 'DeleteWebhookParams',
+  editMessageText: 'EditMessageTextParams',
+  sendPhoto: 'SendPhotoParams',
+  sendDocument: 'SendDocumentParams',
+  sendChatAction: 'SendChatActionParams',
+  getFile: 'GetFileParams',
+  setMyCommands: 'SetMyCommandsParams',
+  answerInlineQuery: 'AnswerInlineQueryParams',
 };
 
 let checks: ReadonlyMap<string, ValidateFunction> | undefined;
@@ -70,18 +77,35 @@ const makeChecks = (): ReadonlyMap<string, ValidateFunction> => {
 
 interface Texts {
   readonly text?: string;
+  readonly caption?: string;
   readonly reply_markup?: { readonly inline_keyboard?: readonly (readonly { callback_data?: string }[])[] };
+  readonly commands?: readonly { readonly command: string; readonly description: string }[];
+  readonly results?: readonly {
+    readonly id: string;
+    readonly input_message_content?: { readonly message_text?: string };
+  }[];
 }
 
-/** The lengths that the documentation gives in words: text 1–4096 characters, callback data 1–64 bytes. */
-const lengthFaults = (method: string, { text = '', reply_markup: markup }: Texts): string[] => {
-  if (method !== 'sendMessage') return [];
+/** The lengths that the documentation gives in words: text 1–4096 characters, caption 0–1024, callback data 1–64 bytes. */
+const lengthFaults = (method: string, params: Texts): string[] => {
+  const { text = '', caption = '', reply_markup: markup, commands = [], results = [] } = params;
   const data = (markup?.inline_keyboard ?? [])
     .flat()
     .map((button) => Buffer.byteLength(button.callback_data ?? ''));
+  const texts = [
+    ...(method === 'sendMessage' || method === 'editMessageText' ? [text] : []),
+    ...results.map((result) => result.input_message_content?.message_text ?? ''),
+  ];
   return [
-    ...(text.trim() === '' || text.length > 4096 ? [`text of ${text.length} characters`] : []),
+    ...texts
+      .filter((one) => one.trim() === '' || one.length > 4096)
+      .map((one) => `text of ${one.length} characters`),
+    ...(caption.length > 1024 ? [`caption of ${caption.length} characters`] : []),
     ...data.filter((bytes) => bytes < 1 || bytes > 64).map((bytes) => `callback data of ${bytes} bytes`),
+    ...commands
+      .filter(({ command, description: { length } }) => !/^[a-z0-9_]{1,32}$/.test(command) || length > 256)
+      .map(({ command }) => `command ${command}`),
+    ...results.filter(({ id }) => !/^[^]{1,64}$/.test(id)).map(({ id }) => `result id ${id}`),
   ];
 };
 

@@ -2,9 +2,11 @@ import { createServer, type IncomingMessage, type ServerResponse } from 'node:ht
 import type { AddressInfo, Socket } from 'node:net';
 
 import { faultsOfCall } from './bot-api-schema.ts';
+import { FakeChats, type Delivered } from './fake-chats.ts';
+import { readCall, type Params, type Upload } from './read-call.ts';
 import { TOKEN } from './token.ts';
 
-export { TOKEN };
+export { TOKEN, type Delivered };
 
 /** What goes wrong with one call. */
 export type Fault =
@@ -20,25 +22,15 @@ export type Fault =
   | 'gateway page'
   | { readonly error_code: number; readonly description: string; readonly retry_after?: number };
 
-/** A message as a person gets it. */
-export interface Delivered {
-  readonly chat_id: number;
-  readonly text: string;
-  readonly buttons: readonly { readonly text: string; readonly callback_data: string }[];
-}
-
-type Params = Record<string, unknown>;
 type Update = { readonly update_id: number } & Record<string, unknown>;
 
 /**
  * A Bot API on this machine: true long polling, offsets that confirm, one poller at a time, and faults on request.
  * Every call is checked against the published schema.
  */
-export class FakeBotApi implements AsyncDisposable {
+export class FakeBotApi extends FakeChats implements AsyncDisposable {
   /** All calls that arrived with the right token, in order. */
   readonly calls: { readonly method: string; readonly params: Params }[] = [];
-  /** All messages that people got, in order. */
-  readonly delivered: Delivered[] = [];
   /** What the caller did that the platform's documentation forbids; to be empty at the end of a test. */
   readonly broken: string[] = [];
   /** Where updates are to be brought, as the bot has asked. */
@@ -116,8 +108,10 @@ export class FakeBotApi implements AsyncDisposable {
 
   async #serve(request: IncomingMessage, response: ServerResponse): Promise<void> {
     if (this.away) return void request.socket.destroy();
-    let body = '';
-    for await (const part of request) body += String(part);
+    const parts: Buffer[] = [];
+    for await (const part of request) parts.push(part as Buffer);
+    const body = Buffer.concat(parts);
+    if (request.url?.startsWith('/file/')) return this.handFile(request.url, response);
     const [, token, method = ''] = /^\/bot([^/]+)\/(\w+)$/.exec(request.url ?? '') ?? [];
     const end = (answer: object, status = 200): void => {
       response.writeHead(status, { 'content-type': 'application/json' }).end(JSON.stringify(answer));
@@ -125,14 +119,15 @@ export class FakeBotApi implements AsyncDisposable {
     const refuse = (error_code: number, description: string, more: object = {}): void =>
       end({ ok: false, error_code, description, ...more }, error_code);
     if (token !== TOKEN) return refuse(401, 'Unauthorized');
-    const params = JSON.parse(body === '' ? '{}' : body) as Params;
+    const { params, file } = await readCall(body, request.headers['content-type'] ?? '');
     this.calls.push({ method, params });
     this.broken.push(...faultsOfCall(method, params).map((fault) => `${method}: ${fault}`));
     this.#callTooEarly(method, params);
     const fault = this.#faults.get(method)?.shift();
     const cut = (): void => void request.socket.destroy();
     if (fault === 'reset') cut();
-    else if (fault === 'receipt lost') this.#perform(method, params, { end: cut, refuse: cut }, response);
+    else if (fault === 'receipt lost')
+      this.#perform(method, params, { end: cut, refuse: cut, file }, response);
     else if (fault === 'gateway page') response.writeHead(502).end('<html>bad gateway</html>');
     else if (typeof fault === 'object') {
       const { error_code, description, retry_after } = fault;
@@ -142,42 +137,35 @@ export class FakeBotApi implements AsyncDisposable {
         refuse(error_code, description, { parameters: { retry_after } });
       }
     } else if (fault === undefined || fault === 'none')
-      this.#perform(method, params, { end, refuse }, response);
+      this.#perform(method, params, { end, refuse, file }, response);
     for (const look of this.#watchers) look();
   }
 
   #perform(
     method: string,
     params: Params,
-    to: { end: (answer: object) => void; refuse: (code: number, description: string) => void },
+    to: {
+      end: (answer: object) => void;
+      refuse: (code: number, description: string) => void;
+      file?: Upload | undefined;
+    },
     response: ServerResponse,
   ): void {
     const done = (result: unknown): void => to.end({ ok: true, result });
     if (method === 'getMe')
       done({ id: 4455667788, is_bot: true, first_name: 'brimnote', username: 'a_cellar_bot' });
-    else if (method === 'sendMessage') done(this.#deliver(params));
-    else if (method === 'getUpdates') this.#poll(params, to, response);
+    else if (method === 'sendMessage' || method === 'sendPhoto' || method === 'sendDocument')
+      done(this.deliver(params, to.file, method));
+    else if (method === 'editMessageText') this.edit(params, to);
+    else if (method === 'getFile') {
+      const file = this.files.get(String(params['file_id']));
+      if (file === undefined) to.refuse(400, 'Bad Request: invalid file_id');
+      else done({ file_id: params['file_id'], file_unique_id: 'u', file_path: file.path });
+    } else if (method === 'getUpdates') this.#poll(params, to, response);
     else if (method === 'setWebhook') {
       this.webhook = params as { url: string; secret_token: string };
       done(true);
     } else done(true);
-  }
-
-  #deliver(params: Params): object {
-    const {
-      chat_id,
-      text,
-      reply_markup: markup,
-    } = params as unknown as Delivered & {
-      reply_markup?: { inline_keyboard: Delivered['buttons'][] };
-    };
-    this.delivered.push({ chat_id, text, buttons: markup?.inline_keyboard.flat() ?? [] });
-    return {
-      message_id: 5000 + this.delivered.length,
-      date: 0,
-      chat: { id: chat_id, type: 'private' },
-      text,
-    };
   }
 
   #poll(

@@ -16,15 +16,18 @@ test('once it is reached the operator hears so, and the next failure is a first 
   const backOff = createBackOff({ root: 'https://bot-api.example', clock, log, tell, signal });
   const failure = new HttpError('failed', new Error('no way'));
   let failures = 2;
-  const getMe = async (): Promise<{ username: string }> => {
+  const getMe = async (): Promise<{ id: number; username: string }> => {
     if (failures > 0) {
       failures -= 1;
       throw failure;
     }
-    return { username: 'harbour_cellar_bot' };
+    return { id: 1, username: 'harbour_cellar_bot' };
   };
   const platform = { calls: { getMe } } as unknown as Platform;
-  expect(await greet(platform, { backOff, log, tell, signal })).toBe(true);
+  expect(await greet(platform, { backOff, log, tell, signal })).toEqual({
+    id: 1,
+    username: 'harbour_cellar_bot',
+  });
   await backOff.failed(failure);
   expect(told.slice(2, 4)).toEqual([
     'The Bot API answers again.',

@@ -4,7 +4,8 @@ import { plainWords } from '../../../src/edge/telegram/plain-words.ts';
 
 test.each([
   ['/start', 'help'],
-  ['/start an-invitation', 'help'],
+  ['/start telegram_3A7-0123456789abcdef', '/start telegram_3A7-0123456789abcdef'],
+  ['/start@a_cellar_bot telegram_3A7-0123456789abcdef', '/start telegram_3A7-0123456789abcdef'],
   ['/START@a_cellar_bot', 'help'],
   ['/help', 'help'],
   ['/help@a_cellar_bot', 'help'],

@@ -8,12 +8,22 @@ import { readUpdates } from '../../../src/edge/telegram/update.ts';
 const NOW = 1_767_000_100_000;
 const FROM = { id: 7001, is_bot: false, first_name: 'Rosa', language_code: 'pt-BR' };
 const CHAT = { id: 7001, type: 'private', first_name: 'Rosa' };
+const ME = { id: 4455667788, username: 'a_cellar_bot' };
 const MESSAGE = { message_id: 12, date: 1_767_000_000, chat: CHAT, from: FROM };
-const WHO = { cellar: 'telegram:7001', chat: 'telegram:7001', person: 'telegram:7001', name: 'Rosa' };
+const WHO = {
+  cellar: 'telegram:7001',
+  chat: 'telegram:7001',
+  person: 'telegram:7001',
+  name: 'Rosa',
+  language: 'pt',
+  linkBegin: 'https://t.me/a_cellar_bot?start=',
+  addressed: 'direct',
+  nonce: expect.stringMatching(/^[0-9a-f]{24}$/),
+} as const;
 
 const arrive = (content: object): ReturnType<typeof toMessage> => {
   const [update] = readUpdates([{ update_id: 900, ...content }]);
-  return update && toMessage(update, NOW);
+  return update && toMessage(update, { received_at: NOW, me: ME });
 };
 
 describe('an update becomes a message', () => {
@@ -26,7 +36,6 @@ describe('an update becomes a message', () => {
         ...WHO,
         id: 'message 12',
         at: 1_767_000_000_000,
-        language: 'pt',
         content: { kind: 'text', text: 'T4 1450 gal' },
       },
     });
@@ -43,7 +52,6 @@ describe('an update becomes a message', () => {
         ...WHO,
         id: 'tap tap-1',
         at: NOW,
-        language: 'pt',
         content: { kind: 'press', key: 'working:3' },
       },
     });
@@ -54,7 +62,17 @@ describe('an update becomes a message', () => {
     expect(arrive({ edited_message })?.message).toMatchObject({
       id: 'message 12 edited 1767000060',
       at: 1_767_000_060_000,
-      content: { kind: 'unreadable', what: 'edited' },
+      content: {
+        kind: 'edited',
+        text: 'T4 1540 gal',
+        original: 'message 12',
+        original_at: 1_767_000_000_000,
+      },
+    });
+    const caption = { ...MESSAGE, photo: [], caption: 'T4', edit_date: 1_767_000_060 };
+    expect(arrive({ edited_message: caption })?.message.content).toEqual({
+      kind: 'unreadable',
+      what: 'edited',
     });
   });
 
@@ -79,14 +97,100 @@ describe('an update becomes a message', () => {
   });
 });
 
+describe('in a group', () => {
+  const chat = { id: -100, type: 'supergroup', title: ' Hill\u202e <b>cellar</b> ' };
+  const group = { ...MESSAGE, chat };
+  const us = { id: ME.id, is_bot: true, first_name: 'brimnote' };
+  const other = { id: 9, is_bot: true, first_name: 'other' };
+
+  test.each<[string, object, string]>([
+    ['what is said among others is overheard', { text: 'T4 1450 gal' }, 'overheard'],
+    ['our name calls us', { text: '@A_Cellar_bot T4?' }, 'called'],
+    ['our name at the end calls us', { text: 'T4?, @a_cellar_bot' }, 'called'],
+    ['a longer name does not', { text: '@a_cellar_bot2 T4?' }, 'overheard'],
+    ['a mail address does not', { text: 'me@a_cellar_bot T4?' }, 'overheard'],
+    [
+      'a mention without a name calls us',
+      { text: 'brimnote T4?', entities: [{ type: 'text_mention', offset: 0, length: 8, user: us }] },
+      'called',
+    ],
+    ['an answer to us calls us', { text: '20 hl', reply_to_message: { from: us } }, 'called'],
+    ['an answer to another does not', { text: '20 hl', reply_to_message: { from: other } }, 'overheard'],
+    ['a command calls us', { text: '/today' }, 'called'],
+    ['a command with our name calls us', { text: '/today@a_cellar_bot' }, 'called'],
+    ['a command for another bot does not', { text: '/today@b_cellar_bot' }, 'overheard'],
+    ['a path does not', { text: '/usr/bin' }, 'overheard'],
+    ['our name under a picture calls us', { photo: [], caption: '@a_cellar_bot' }, 'called'],
+  ])('%s', (_, fields, addressed) => {
+    expect(arrive({ message: { ...group, ...fields } })?.message.addressed).toBe(addressed);
+  });
+
+  test('the answer goes to the message, in its topic where it stands in one', () => {
+    expect(arrive({ message: { ...group, text: 'x' } })).toMatchObject({ chatId: -100, replyTo: 12 });
+    const topic = { ...group, text: 'x', message_thread_id: 5, is_topic_message: true };
+    expect(arrive({ message: topic })).toMatchObject({ chatId: -100, replyTo: 12, threadId: 5 });
+    const reply = { ...group, text: 'x', message_thread_id: 5 };
+    expect(arrive({ message: reply })).not.toHaveProperty('threadId');
+    const tap = { id: 't', from: FROM, message: topic, data: 'k' };
+    expect(arrive({ callback_query: tap })).toMatchObject({
+      replyTo: 12,
+      threadId: 5,
+      message: { addressed: 'called' },
+    });
+  });
+
+  test('its title is shown on one line, and nothing in it turns what follows', () => {
+    expect(arrive({ message: { ...group, text: 'x' } })?.message.title).toBe('Hill <b>cellar</b>');
+  });
+
+  const change = (before: string, after: string, more: object = {}): object => ({
+    my_chat_member: {
+      chat,
+      from: FROM,
+      date: 1_767_000_000,
+      old_chat_member: { status: before, user: us },
+      new_chat_member: { status: after, user: us, ...more },
+    },
+  });
+  test.each([
+    ['left', 'member', true],
+    ['kicked', 'administrator', true],
+    ['member', 'administrator', false],
+    ['member', 'left', false],
+    ['administrator', 'kicked', false],
+  ])('from %s to %s we say who we are: %s', (before, after, isJoin) => {
+    expect(arrive(change(before, after))?.isJoin ?? false).toBe(isJoin);
+  });
+
+  test.each([
+    ['a list', { file_name: '../../etc/vessels.CSV' }, true],
+    [
+      'a spreadsheet without a name',
+      { mime_type: 'application/vnd.openxmlformats-officedocument.spreadsheetml.sheet' },
+      true,
+    ],
+    ['a text that says it is a picture', { file_name: 'a.pdf', mime_type: 'image/png' }, false],
+    ['a name that is none', { file_name: 7 }, false],
+  ])('%s is a sheet: %s', (_, fields, isSheet) => {
+    const document = { file_id: 'f', file_unique_id: 'u', ...fields };
+    const file = arrive({ message: { ...MESSAGE, document } })?.file;
+    expect(file).toEqual(isSheet ? { fileId: 'f' } : undefined);
+    expect(arrive({ message: { ...group, document } })?.file).toBeUndefined();
+  });
+});
+
 describe('an update is passed over', () => {
-  const group = { ...CHAT, id: -100, type: 'supergroup' };
+  const channel = { ...CHAT, id: -100, type: 'channel' };
   test.each<[string, object]>([
     ['a kind that nobody knows', { something_new: { a: 1 } }],
     ['a poll answer', { poll_answer: { poll_id: '1' } }],
     ['a pinned message', { message: { ...MESSAGE, pinned_message: MESSAGE } }],
-    ['a message in a group', { message: { ...MESSAGE, chat: group, text: 'T4 1450 gal' } }],
-    ['a tap in a group', { callback_query: { id: '1', from: FROM, message: { chat: group }, data: 'x' } }],
+    ['a message in a channel', { message: { ...MESSAGE, chat: channel, text: 'T4 1450 gal' } }],
+    [
+      'a tap in a channel',
+      { callback_query: { id: '1', from: FROM, message: { chat: channel }, data: 'x' } },
+    ],
+    ['a question behind our name', { inline_query: { id: '1', from: FROM, query: 'T4', offset: '' } }],
     [
       'a tap without data',
       { callback_query: { id: '1', from: FROM, message: { chat: CHAT }, game_short_name: 'x' } },

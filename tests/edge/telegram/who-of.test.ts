@@ -13,8 +13,8 @@ test('a chat and the person in it have names of their own, and each chat is a ce
 
 test.each([
   ['private', true],
-  ['group', false],
-  ['supergroup', false],
+  ['group', true],
+  ['supergroup', true],
   ['channel', false],
 ])('in a chat of the kind %s the bot speaks: %s', (type, served) => {
   expect(isServed({ id: 1, type })).toBe(served);

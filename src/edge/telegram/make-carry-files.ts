@@ -1,0 +1,86 @@
+import type { IncomingMessage } from '../../chat/conversation/ports.ts';
+import { nothingRead } from '../../chat/attachments/import-read.ts';
+import type { Settings } from '../../chat/conversation/settings.ts';
+import type { Said, Say } from '../../chat/replies/say.ts';
+import type { Clock } from '../clock.ts';
+import { FILE_LIMITS } from '../files/file-limits.ts';
+import type { Log } from '../logging.ts';
+import type { makeRunErrand } from '../run-errand.ts';
+import type { Arrival } from './arrival.ts';
+import type { CarryFiles } from './carry-files.ts';
+import { fetchFile } from './fetch-file.ts';
+import type { Platform } from './platform.ts';
+import { LONGEST_CAPTION, sendFile } from './send-file.ts';
+import { whileTyping, type Doing } from './while-typing.ts';
+
+/** What has to do with files, as the program joins it. */
+export interface FileWork {
+  readonly runErrand: ReturnType<typeof makeRunErrand>;
+  /** What numbers and units in a sheet are read by. */
+  readonly settings: Settings;
+  /** Whether a sheet of this message is worth fetching: a stranger's is not. */
+  readonly isAdmitted: (message: IncomingMessage) => Promise<boolean>;
+}
+
+/** What carrying files needs. */
+export interface CarryOptions {
+  /** Absent: nothing is carried. */
+  readonly fileWork?: FileWork;
+  readonly say: Say;
+  readonly platform: Platform;
+  readonly config: { readonly botToken: string; readonly botApiRoot: string };
+  readonly clock: Clock;
+  readonly log: Log;
+  readonly signal: AbortSignal;
+}
+
+/** What is shown while an errand is done. */
+const DOING: Readonly<Record<string, Doing>> = { picture: 'upload_photo', export: 'upload_document' };
+
+/** Makes the carrying of files. */
+export function makeCarryFiles(options: CarryOptions): CarryFiles {
+  const { fileWork: work, say, platform, config, signal } = options;
+  const sending = { ...options, api: platform.calls };
+  const failed = ({ language }: IncomingMessage): Said =>
+    say({ language, lines: [{ room: 'first', key: 'errand-failed', values: {} }], buttons: [] });
+
+  const contentOf = async (
+    { message, file }: Arrival,
+    { settings }: FileWork,
+  ): Promise<IncomingMessage['content']> => {
+    const { fileId, size_bytes = 0 } = file ?? { fileId: '' };
+    const longest_bytes = FILE_LIMITS.own_bytes;
+    const place = { api: platform.calls, token: config.botToken, root: config.botApiRoot, longest_bytes };
+    const bytes = size_bytes > longest_bytes ? undefined : await fetchFile(fileId, { ...place, signal });
+    if (bytes === undefined) return { kind: 'file', read: nothingRead('too-large') };
+    const { readImport } = await import('../files/read-import.ts');
+    const noting = { key: `import ${JSON.stringify([message.chat, message.id])}`, at: message.at, by: 1 };
+    return { kind: 'file', read: await readImport(bytes, { reader: settings, noting }) };
+  };
+
+  return {
+    read: async (arrival) => {
+      const { message } = arrival;
+      if (work === undefined || !(await work.isAdmitted(message))) return message;
+      const reading = contentOf(arrival, work);
+      const content = await whileTyping({ ...arrival, doing: 'typing' }, reading, sending);
+      return { ...message, content };
+    },
+    run: async (arrival, errand, message) => {
+      if (work === undefined) return [failed(message)];
+      const doing = DOING[errand.kind] ?? 'typing';
+      const running = (async (): Promise<readonly Said[]> => {
+        const { said, file } = await work.runErrand(errand, message);
+        if (file === undefined) return said;
+        const [first] = said;
+        const isBeside =
+          said.length === 1 && first?.buttons.length === 0 && first.text.length <= LONGEST_CAPTION;
+        const caption = isBeside && first !== undefined ? { caption: first.text } : {};
+        const isSent = await sendFile({ file, spot: arrival, ...caption }, sending);
+        if (!isSent) return [failed(message)];
+        return isBeside ? [] : said;
+      })();
+      return whileTyping({ ...arrival, doing }, running, sending);
+    },
+  };
+}

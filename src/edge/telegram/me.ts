@@ -1,0 +1,5 @@
+/** Who we are on the platform. */
+export interface Me {
+  readonly id: number;
+  readonly username: string;
+}
