@@ -1,4 +1,5 @@
-import type { Measurement, VesselChange, WineTraits } from '../../core/cellar/entry.ts';
+import type { Measurement, VesselChange } from '../../core/cellar/entry.ts';
+import { TRAIT_NAMES } from '../../core/cellar/trait-names.ts';
 import type { FieldName, Fields, Reading } from '../reader/understood.ts';
 import type { Here } from './here.ts';
 import type { Note } from './note.ts';
@@ -7,18 +8,8 @@ import { vesselsIn } from './vessels-named.ts';
 import { whenOf } from './when.ts';
 
 const MEASURED = ['ph', 'free_mg_L', 'total_mg_L', 'temperature_C'] as const;
-const TRAITS = [
-  'style',
-  'category',
-  'product',
-  'organic',
-  'stage',
-  'alcohol_percent',
-  'sugar_g_L',
-] as const satisfies readonly (keyof WineTraits)[];
-
 /** The fields of a reading that the log takes. */
-export const LOGGED_FIELDS: readonly FieldName[] = [...MEASURED, ...TRAITS, 'volume_L'];
+export const LOGGED_FIELDS: readonly FieldName[] = [...MEASURED, ...TRAIT_NAMES, 'volume_L'];
 
 /**
  * What a message about a vessel leaves in the log: what was measured, and what was told beside it. Nothing where the
@@ -31,7 +22,7 @@ export function notesOfReading(reading: Reading, here: Here): Note[] {
   if (intent !== 'dose' && intent !== 'reading' && intent !== 'effect') return [];
   const fresh = without(saidFields(reading), noted);
   const measured = pick(fresh, MEASURED);
-  const traits = pick(fresh, TRAITS);
+  const traits = pick(fresh, TRAIT_NAMES);
   const volume_L = fresh.volume_L === undefined ? undefined : fresh.volume_L / vessels.length;
   const beside = { vessels, ...traits, ...(volume_L !== undefined && { volume_L }), ...remarkOf(reading) };
   const { at } = whenOf(reading, here, lastAdditionAt(vessels, here));

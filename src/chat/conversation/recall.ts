@@ -1,4 +1,5 @@
 import type { AdditiveNoted } from '../../core/cellar/entry.ts';
+import { TRAIT_NAMES } from '../../core/cellar/trait-names.ts';
 import type { Vessel } from '../../core/cellar/vessel.ts';
 import { DAY_ms } from '../../core/time/durations.ts';
 import { finishReading } from '../reader/finish-reading.ts';
@@ -8,18 +9,8 @@ import type { Plan } from './plan.ts';
 
 /** What is filled in from memory, by what is asked. Free SO2 never is: it is measured. */
 const FILLED: Readonly<Partial<Record<Reading['intent'], readonly FieldName[]>>> = {
-  dose: [
-    'volume_L',
-    'ph',
-    'style',
-    'category',
-    'product',
-    'organic',
-    'stage',
-    'alcohol_percent',
-    'sugar_g_L',
-  ],
-  effect: ['volume_L', 'style', 'category', 'product', 'organic', 'stage', 'alcohol_percent', 'sugar_g_L'],
+  dose: ['volume_L', 'ph', ...TRAIT_NAMES],
+  effect: ['volume_L', ...TRAIT_NAMES],
   added: ['volume_L'],
 };
 

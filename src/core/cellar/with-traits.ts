@@ -1,16 +1,7 @@
 import type { Stage } from '../wine.ts';
 import type { Entry, WineTraits } from './entry.ts';
+import { TRAIT_NAMES } from './trait-names.ts';
 import type { Known, KnownTraits, Vessel } from './vessel.ts';
-
-const TRAITS = [
-  'style',
-  'category',
-  'product',
-  'organic',
-  'stage',
-  'alcohol_percent',
-  'sugar_g_L',
-] as const satisfies readonly (keyof WineTraits)[];
 
 /**
  * A vessel with what was told of its wine: alcohol in % vol, sugar in g/L. Wine that goes into malolactic or comes out
@@ -26,7 +17,7 @@ const TRAITS = [
  * ```
  */
 export function withTraits(vessel: Vessel, told: WineTraits, { at, entry }: Entry): Vessel {
-  const fresh = TRAITS.flatMap((name) => {
+  const fresh = TRAIT_NAMES.flatMap((name) => {
     const value = told[name];
     return value === undefined ? [] : [[name, { value, at, entry } satisfies Known<unknown>] as const];
   });

@@ -2,6 +2,7 @@ import type { CellarView } from '../../../core/cellar/cellar-store.ts';
 import type { Addition, LoggedEntry, Order } from '../../../core/cellar/entry.ts';
 import { added } from '../../../core/dose/added.ts';
 import { dose } from '../../../core/dose/dose.ts';
+import { emptyReading } from '../../reader/empty-reading.ts';
 import type { Reading } from '../../reader/understood.ts';
 import { momentText } from '../../replies/moment-text.ts';
 import { vesselNames } from '../../replies/vessel-name.ts';
@@ -73,17 +74,7 @@ export async function notedBy(
   return { standing, next: before.length === 0 ? key : `${key} ${before.length}` };
 }
 
-const NO_READING: Reading = {
-  intent: 'added',
-  fields: {},
-  assumed: {},
-  asks: [],
-  problems: [],
-  setAside: [],
-  notes: [],
-  marks: {},
-  where: {},
-};
+const NO_READING: Reading = emptyReading('added');
 
 function noted({ lines, buttons, notes = [], keeps = [] }: Outcome, here: Here): Handled {
   const { writes, ...said } = replying(here, { lines, buttons });
