@@ -1,25 +1,9 @@
 import type { AdditiveId } from '../../core/additives/additive-id.ts';
+import type { SaidDay, SaidWhen as SaidMoment } from '../../core/time/said-when.ts';
 import type { Basis } from '../../core/wine.ts';
 
-/** A day as it was said; what it is on the calendar depends on when and where it was said. */
-export type SaidDay =
-  | { readonly is: 'today' }
-  | { readonly is: 'yesterday' }
-  | { readonly is: 'before-yesterday' }
-  /** So many days ago, 3 or more. */
-  | { readonly is: 'days-ago'; readonly days: number }
-  /** The last such day before today; 1 is Monday. */
-  | { readonly is: 'weekday'; readonly weekday: number }
-  /** Without a year the last such date that is not in the future. */
-  | { readonly is: 'date'; readonly day: number; readonly month: number; readonly year?: number };
-
-/** A moment as it was said: a day, an hour of the clock (0–23) and minute, or so many hours ago. */
-export interface SaidWhen {
-  readonly day?: SaidDay;
-  readonly hour?: number;
-  readonly minute?: number;
-  readonly hours_ago?: number;
-  /** The person's own words. */
+/** A moment as it was said, with the person's own words. */
+export interface SaidWhen extends SaidMoment {
   readonly text: string;
 }
 

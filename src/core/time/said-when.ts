@@ -1,6 +1,7 @@
 /** A day as people say it; what it is on the calendar depends on when and where they say it. */
 export type SaidDay =
   | { readonly is: 'today' | 'yesterday' | 'before-yesterday' }
+  /** So many days ago, 3 or more. */
   | { readonly is: 'days-ago'; readonly days: number }
   /** The last such day before today; 1 is Monday. */
   | { readonly is: 'weekday'; readonly weekday: number }

@@ -1,4 +1,5 @@
-import type { Command, SaidDay } from '../command.ts';
+import type { SaidDay } from '../../../core/time/said-when.ts';
+import type { Command } from '../command.ts';
 import { dayAt } from '../moments/day-at.ts';
 import type { Talk } from './talk.ts';
 import { says, saysOnly } from './talk.ts';

@@ -1,4 +1,5 @@
-import type { Command, SaidDay, Span } from '../command.ts';
+import type { SaidDay } from '../../../core/time/said-when.ts';
+import type { Command, Span } from '../command.ts';
 import { MONTHS } from '../moments/calendar.ts';
 import { dayAt } from '../moments/day-at.ts';
 import type { Piece } from '../own-pieces.ts';

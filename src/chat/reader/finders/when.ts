@@ -1,6 +1,7 @@
 import type { Board } from '../board.ts';
 import { claim, wordsOf } from '../board.ts';
-import type { SaidDay, SaidWhen } from '../command.ts';
+import type { SaidDay } from '../../../core/time/said-when.ts';
+import type { SaidWhen } from '../command.ts';
 import { agoAt } from '../moments/ago-at.ts';
 import type { ClockAt } from '../moments/clock-at.ts';
 import { clockAt, isTime } from '../moments/clock-at.ts';

@@ -1,4 +1,4 @@
-import type { SaidDay } from '../command.ts';
+import type { SaidDay } from '../../../core/time/said-when.ts';
 import type { Piece } from '../own-pieces.ts';
 import { isOwn } from '../own-pieces.ts';
 import { countAt, daysAt } from './count-at.ts';

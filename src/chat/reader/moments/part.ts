@@ -1,4 +1,4 @@
-import type { SaidDay } from '../command.ts';
+import type { SaidDay } from '../../../core/time/said-when.ts';
 
 /** A part of a moment: a day, a time, both, or so long ago; with the pieces it stands in. */
 export interface Part {

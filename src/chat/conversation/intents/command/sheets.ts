@@ -3,7 +3,7 @@ import type { LoggedEntry } from '../../../../core/cellar/entry.ts';
 import { dayBounds } from '../../../../core/time/day-bounds.ts';
 import { momentOf } from '../../../../core/time/moment-of.ts';
 import { resolveDay } from '../../../../core/time/resolve-day.ts';
-import type { SaidDay } from '../../../reader/command.ts';
+import type { SaidDay } from '../../../../core/time/said-when.ts';
 import { clockText, dayText, momentText } from '../../../replies/moment-text.ts';
 import type { Line } from '../../../replies/reply.ts';
 import { vesselName } from '../../../replies/vessel-name.ts';
