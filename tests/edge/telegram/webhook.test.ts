@@ -138,7 +138,7 @@ test('the pages for whoever runs it: alive, ready or what is missing, and figure
   expect(figures).toContain('\nbrimnote_inbox_updates 0\n');
   expect(figures).toContain('\nbrimnote_outbox_oldest_age_seconds 0\n');
   expect(figures).toMatch(/\nbrimnote_handling_seconds_count 2\n/);
-  expect(figures).not.toMatch(/"[^"\n]*7001|Rosa/);
+  expect(figures).not.toMatch(/"[^"\n]*\b7001\b[^"\n]*"|Rosa/);
 });
 
 test('is not ready while store or platform cannot be reached', async () => {
