@@ -69,6 +69,21 @@ const TRIED: readonly [what: string, run: (scene: Scene) => Promise<void>][] = [
     },
   ],
   [
+    'a file that the platform does not hand over is told of, and no error shows the token',
+    async ({ api, rosa }) => {
+      api.fail('getFile', 'gateway page', 'gateway page', {
+        error_code: 400,
+        description: 'Bad Request: file is gone',
+      });
+      api.files.set('f', { path: 'documents/file_1', bytes: new Uint8Array(3) });
+      rosa.sends(document());
+      await rosa.reads(1);
+      expect(api.fetched).toEqual([]);
+      rosa.sends(DOSE);
+      expect(await rosa.reads(2)).toContain('117 g');
+    },
+  ],
+  [
     'a file that says it is too long is not fetched',
     async ({ api, rosa }) => {
       rosa.sends(document({ file_size: 9 * 1024 * 1024 }));
