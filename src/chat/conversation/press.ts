@@ -50,7 +50,16 @@ export async function handlePress(key: string, here: Here, view: CellarView): Pr
     case 'ga':
     case 'gd':
       return answerSampled(found, button.does, near, view);
-    default:
+    case 'w':
+    case 's':
+    case 't':
+    case 'm':
+    case 'nf':
+    case 'red':
+    case 'white':
+    case 'c':
+    case 'l':
+    case 'y':
       return pressed(button.does, button.which, found, near);
   }
 }

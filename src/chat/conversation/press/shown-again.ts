@@ -2,7 +2,7 @@ import { added } from '../../../core/dose/added.ts';
 import { dose } from '../../../core/dose/dose.ts';
 import { effect } from '../../../core/dose/effect.ts';
 import { solution } from '../../../core/dose/solution.ts';
-import type { DoseAnswer, Warning } from '../../../core/dose/answer.ts';
+import type { Warning } from '../../../core/dose/answer.ts';
 import type { Step } from '../../../core/working.ts';
 import type { Reading } from '../../reader/understood.ts';
 import type { Button, Line } from '../../replies/reply.ts';
@@ -100,9 +100,6 @@ export function moreLines(found: Remembered, here: Here): { lines: Line[]; butto
   const head = line('first', 'more-head', { vessel: vesselText(reading) });
   return {
     lines: [head, ...(warnings.length > 0 ? warnings : [line('first', 'more-no-warnings')])],
-    buttons: buttonsFor(
-      ref,
-      buttonsBehind(reading, warned, toBeWeighed(reading, reckoned as DoseAnswer) !== undefined),
-    ),
+    buttons: buttonsFor(ref, buttonsBehind(reading, warned, toBeWeighed(reading, reckoned) !== undefined)),
   };
 }
