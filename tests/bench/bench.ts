@@ -1,4 +1,7 @@
 /** `npm run bench`: what a message costs, beside what was aimed at. Aims are no tests: machines differ. */
+import { mkdtempSync, rmSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
 import { handle } from '../../src/chat/conversation/conversation.ts';
 import { DEFAULT_SETTINGS } from '../../src/chat/conversation/settings.ts';
 import { readMessage } from '../../src/chat/reader/read-message.ts';
@@ -8,6 +11,7 @@ import { say } from '../fuzz/say.ts';
 import { writtenMessages } from '../fuzz/written-messages.ts';
 import { HARD_TEXTS } from './hard-texts.ts';
 import { runAsk } from './programs.ts';
+import { timeLargeCellar } from './large-cellar.ts';
 import { roundOf } from './rounds.ts';
 import { median, timeOf } from './timing.ts';
 
@@ -102,3 +106,27 @@ const lines = Array.from({ length: JSONL_LINES }, (_, at) =>
 const jsonl = await runAsk(['--jsonl'], `${lines.join('\n')}\n`);
 row(`${JSONL_LINES} lines through ask --jsonl`, `${(jsonl.milliseconds / 1000).toFixed(1)} s`, 'under 15 s');
 row('… lines answered', String(jsonl.lines), String(JSONL_LINES));
+
+if (process.env['BENCH_QUICK'] === undefined) {
+  const folder = mkdtempSync(join(tmpdir(), 'brimnote-bench-'));
+  try {
+    await timeLargeCellar(folder, 999); // warms up
+    const [small, large] = [await timeLargeCellar(folder, 1000), await timeLargeCellar(folder, 1_000_000)];
+    row('known vessel, of 1,000 entries', ms(small.known_ms));
+    row(
+      '… of 1,000,000',
+      ms(large.known_ms),
+      `at most twice: ${(large.known_ms / small.known_ms).toFixed(2)} ×`,
+    );
+    row('sheet of a day, of 1,000 entries', ms(small.sheet_ms));
+    row(
+      '… of 1,000,000',
+      ms(large.sheet_ms),
+      `at most twice: ${(large.sheet_ms / small.sheet_ms).toFixed(2)} ×`,
+    );
+    row('"noted", durable', ms(small.noted_ms));
+    row('… above a bare commit', ms(small.noted_ms - small.commit_ms), 'at most 1.5 ms');
+  } finally {
+    rmSync(folder, { recursive: true });
+  }
+}

@@ -50,11 +50,13 @@ export interface Here extends CellarFacts {
 /** What is known of the person and the cellar before the message is read. */
 export async function arrive(message: IncomingMessage, view: CellarView, defaults: Settings): Promise<Here> {
   const known = await view.person(message.person);
-  const kept = await view.kept(memoryKey(message));
-  const set = await view.kept(SETTINGS_KEY);
+  // In one look: every message asks for these.
+  const all = await view.keptOf([memoryKey(message), SETTINGS_KEY, ROSTER_KEY, ZONE_ASKED_KEY]);
+  const kept = all.get(memoryKey(message));
+  const set = all.get(SETTINGS_KEY);
   const people = known === undefined ? await view.people() : [];
   const me = known?.number ?? Math.max(0, ...people.map(({ number }) => number)) + 1;
-  const roster = readRoster(await view.kept(ROSTER_KEY));
+  const roster = readRoster(all.get(ROSTER_KEY));
   return {
     ...NO_FACTS,
     message,
@@ -65,7 +67,7 @@ export async function arrive(message: IncomingMessage, view: CellarView, default
     role: roleOf(roster, me, message),
     isNewPerson: known === undefined || (message.name !== undefined && known.name !== message.name),
     nextEntry: await view.nextEntry(),
-    isZoneAsked: (await view.kept(ZONE_ASKED_KEY)) !== undefined,
+    isZoneAsked: all.has(ZONE_ASKED_KEY),
     done: new Set(),
   };
 }
@@ -75,15 +77,21 @@ export async function withVessels(here: Here, view: CellarView, names: readonly 
   const vessels = new Map<string, Vessel>();
   const claims = new Map<string, Claim>();
   const plans = new Map<string, Plan>();
-  for (const name of new Set(names)) {
+  const each = [...new Set(names)];
+  const kept = each.length === 0 ? new Map<string, string>() : await view.keptOf(each.flatMap(keysOf));
+  for (const name of each) {
     const vessel = await view.vessel(name);
     if (vessel) vessels.set(name, vessel);
-    const claim = await view.kept(claimKey(name));
+    const claim = kept.get(claimKey(name));
     if (claim !== undefined) claims.set(name, JSON.parse(claim) as Claim);
-    const plan = await view.kept(planKey(name));
+    const plan = kept.get(planKey(name));
     if (plan !== undefined) plans.set(name, JSON.parse(plan) as Plan);
   }
   if (vessels.size + claims.size === 0) return { ...here, vessels, claims, plans };
   const people = new Map((await view.people()).map((person) => [person.number, person]));
   return { ...here, vessels, claims, plans, people };
+}
+
+function keysOf(vessel: string): string[] {
+  return [claimKey(vessel), planKey(vessel)];
 }

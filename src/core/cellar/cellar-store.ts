@@ -51,6 +51,8 @@ export interface CellarView {
   people(): Promise<readonly Person[]>;
   /** The text that was kept under a key and has not lapsed. */
   kept(key: string): Promise<string | undefined>;
+  /** The texts that are kept under these keys and have not lapsed, by key: in one look. */
+  keptOf(keys: readonly string[]): Promise<ReadonlyMap<string, string>>;
   /** All that is kept under keys that begin with these letters, by key. */
   keptUnder(begin: string): Promise<readonly { readonly key: string; readonly text: string }[]>;
   due(id: string): Promise<Due | undefined>;

@@ -39,6 +39,20 @@ export function testKeeping(create: CreateStore): void {
     await store.close();
   });
 
+  test('gives back several texts in one look, without those that are not there or have lapsed', async () => {
+    let now = 0;
+    const store = await create(() => now);
+    await keep(store, 'a', '1');
+    await keep(store, "b '%_", '2');
+    await keep(store, 'c', '3', 100);
+    now = 100;
+    const look = (keys: string[]): Promise<ReadonlyMap<string, string>> =>
+      store.look('cellar 1', (view) => view.keptOf(keys));
+    expect(Object.fromEntries(await look(['a', "b '%_", 'c', 'd', 'a']))).toEqual({ a: '1', "b '%_": '2' });
+    expect((await look([])).size).toBe(0);
+    await store.close();
+  });
+
   test('lets a text lapse at its moment; a later one without an end stays', async () => {
     let now = 0;
     const store = await create(() => now);

@@ -49,6 +49,12 @@ export function createMemoryView(cellar: MemoryCellar, now: () => number): Cella
       const found = cellar.kept.get(key);
       return found !== undefined && unlapsed(found.until) ? found.text : undefined;
     },
+    keptOf: async (keys) => {
+      const found = keys.map((key) => [key, cellar.kept.get(key)] as const);
+      return new Map(
+        found.flatMap(([key, one]) => (one && unlapsed(one.until) ? [[key, one.text] as const] : [])),
+      );
+    },
     keptUnder: async (begin) =>
       [...cellar.kept]
         .filter(([key, { until }]) => key.startsWith(begin) && unlapsed(until))

@@ -25,6 +25,17 @@ export async function readKept(
   return (await unlapsed(db, cellar, now).where('key', '=', key).executeTakeFirst())?.text;
 }
 
+/** The texts under some keys that have not lapsed, by key. */
+export async function readKeptOf(
+  db: Kysely<Tables>,
+  cellar: string,
+  { keys, now }: { readonly keys: readonly string[]; readonly now: number },
+): Promise<ReadonlyMap<string, string>> {
+  if (keys.length === 0) return new Map();
+  const rows = await unlapsed(db, cellar, now).where('key', 'in', keys).execute();
+  return new Map(rows.map(({ key, text }) => [key, text]));
+}
+
 /** The texts under keys that begin so and have not lapsed, by key. */
 export async function readKeptUnder(
   db: Kysely<Tables>,

@@ -1,7 +1,7 @@
 import type { Kysely } from 'kysely';
 import type { CellarView } from '../../../core/cellar/cellar-store.ts';
 import { readAllDue, readDue } from './due-things.ts';
-import { readKept, readKeptUnder } from './kept-texts.ts';
+import { readKept, readKeptOf, readKeptUnder } from './kept-texts.ts';
 import { readPeople, readPerson } from './people.ts';
 import {
   readEntries,
@@ -40,6 +40,7 @@ export function createSqlView(db: Kysely<Tables>, { cellar, now, onRead }: SqlVi
     person: (id) => readPerson(looking(), cellar, id),
     people: () => readPeople(looking(), cellar),
     kept: (key) => readKept(looking(), cellar, { key, now: now() }),
+    keptOf: (keys) => readKeptOf(looking(), cellar, { keys, now: now() }),
     keptUnder: (begin) => readKeptUnder(looking(), cellar, { begin, now: now() }),
     due: (id) => readDue(looking(), cellar, id),
     allDue: () => readAllDue(looking(), cellar),
