@@ -1,17 +1,16 @@
 /**
- * Somebody types to the program on a small disk of its own (the working directory, handed in), which fills up, has room
+ * Somebody types to the program on a small disk of its own (the working directory), which fills up, has room
  * again, and fills up once more. Says on stdout as JSON what came of it.
  */
 import { rmSync, writeFileSync } from 'node:fs';
-import { join } from 'node:path';
+import { resolve } from 'node:path';
 import { readLog } from '../../soak/terminal/count-traces.ts';
 import { runProgram, Typing } from '../../soak/terminal/typing.ts';
 
-const [disk = ''] = process.argv.slice(2);
-const BALLAST_bytes = 2_000_000;
+const BALLAST_bytes = 1_500_000;
 const MOST_TYPED = 4000;
-const file = join(disk, 'cellar.db');
-const ballast = join(disk, 'ballast');
+const file = resolve('cellar.db');
+const ballast = resolve('ballast');
 /** What people are told where nothing could be written. */
 const REFUSED = /^Not noted.*$/m;
 
@@ -45,12 +44,9 @@ async function fillUp(typing: Typing): Promise<void> {
 }
 
 writeFileSync(ballast, Buffer.alloc(BALLAST_bytes));
-const typing = new Typing(file, disk);
+const typing = new Typing(file);
 await fillUp(typing);
 const whileFull = kept.length;
-typing.type('today');
-while (typing.hears(/^.*Dec.*:$|^\d+ · .*$/m) === undefined && !typing.isOver) await typing.more();
-const answersWhileFull = !typing.isOver;
 rmSync(ballast);
 const wentOn = await add(typing);
 await fillUp(typing);
@@ -66,15 +62,12 @@ process.stdout.write(
     keptBefore: whileFull,
     keptAfter: kept.length - whileFull,
     refused: refused.length,
-    answersWhileFull,
     wentOn,
-
     lost: kept.filter((mass_g) => !masses.includes(mass_g)),
     half: refused.filter((mass_g) => masses.includes(mass_g)),
     twice: masses.length - new Set(masses).size,
     rebuilt,
     status,
     toldOperator: /full/i.test(typing.complaints),
-    complaints: typing.complaints.slice(0, 300),
   }),
 );

@@ -24,8 +24,6 @@ const AHEAD = 12;
 const LONGEST_LIFE_ms = 1000;
 const LONGEST_BEGINNING_ms = 500;
 const KILLED_EARLY_share = 0.2;
-/** Whoever says nothing for so long is at fault. */
-const SILENCE_ms = 20_000;
 
 /** The stream, as far as it was needed. */
 class Stream {
@@ -107,11 +105,7 @@ async function lifeOf(
       killed ??= killAfter(LONGEST_LIFE_ms);
     }
     if (typing.isOver) break;
-    const isSilent = await Promise.race([typing.more(), wait(SILENCE_ms, true, { ref: false })]);
-    if (isSilent === true) {
-      await typing.kill();
-      throw new Error(`no answer to ${stream.at(heard).text} of ${heard}..${typed} in: ${typing.rest}`);
-    }
+    await typing.more();
   }
   await killed;
   return heard;

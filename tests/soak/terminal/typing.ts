@@ -1,6 +1,10 @@
 import { spawn, type ChildProcess } from 'node:child_process';
 import { once } from 'node:events';
+import { setTimeout as wait } from 'node:timers/promises';
 import { fileURLToPath } from 'node:url';
+
+/** Whoever says nothing for so long is at fault. */
+const SILENCE_ms = 20_000;
 
 const path = (name: string): string => fileURLToPath(new URL(`../../../src/${name}`, import.meta.url));
 
@@ -46,15 +50,17 @@ export class Typing {
     return match[0];
   }
 
-  /** What was said and not heard. */
-  get rest(): string {
-    return this.#said.slice(this.#seen);
-  }
-
-  /** Resolves when something more was said, or all is over. */
+  /**
+   * Resolves when something more was said, or all is over.
+   *
+   * @throws Error where nothing is said for long
+   */
   async more(): Promise<void> {
     if (this.isOver) return;
-    await new Promise<void>((resolve) => (this.#wake = resolve));
+    const said = new Promise<boolean>((resolve) => (this.#wake = () => resolve(true)));
+    if (await Promise.race([said, wait(SILENCE_ms, false, { ref: false })])) return;
+    await this.kill();
+    throw new Error(`silence after: ${this.#said.slice(this.#seen)}`);
   }
 
   async kill(): Promise<void> {
