@@ -27,15 +27,22 @@ const NOW = Date.UTC(2026, 10, 12, 12);
 /** Fills a file with readings and additions up to yesterday, and one day's worth today; then times answers in it. */
 export async function timeLargeCellar(folder: string, entries: number): Promise<LargeCellar> {
   let now = NOW;
-  const store = await openSqliteStore(join(folder, `of-${entries}.db`), { now: () => now, report: throwIt });
+  const open = () => openSqliteStore(join(folder, `of-${entries}.db`), { now: () => now, report: throwIt });
+  const filling = await open();
   try {
     for (let from = 0; from < entries; from += A_TURN) {
       const writes = Array.from({ length: Math.min(A_TURN, entries - from) }, (_, k) =>
         entryAt(from + k, entries),
       );
       const people: Write[] = from === 0 ? [{ kind: 'person', id: 'p', number: 1, name: 'Ana' }] : [];
-      await store.turn(CELLAR, async () => ({ writes: [...people, ...writes], result: undefined }));
+      await filling.turn(CELLAR, async () => ({ writes: [...people, ...writes], result: undefined }));
     }
+  } finally {
+    await filling.close();
+  }
+  // Opened anew: what the filling left to be written to the disk is not the answers'.
+  const store = await open();
+  try {
     const serve = makeServe({ handle, say, store, settings: DEFAULT_SETTINGS, report: throwIt });
     let count = 0;
     const timed = async (text: string, times: number): Promise<number> => {
