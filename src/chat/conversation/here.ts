@@ -88,7 +88,15 @@ export async function withVessels(here: Here, view: CellarView, names: readonly 
     if (plan !== undefined) plans.set(name, JSON.parse(plan) as Plan);
   }
   if (vessels.size + claims.size === 0) return { ...here, vessels, claims, plans };
-  const people = new Map((await view.people()).map((person) => [person.number, person]));
+  const { me, message } = here;
+  const by = [
+    ...claims.values(),
+    ...[...vessels.values()].flatMap((one) => [...one.additions, ...one.orders]),
+  ];
+  // Where nobody else had a hand in it, nobody else is looked up.
+  const isMine = message.name !== undefined && by.every((one) => one.by === me);
+  const all = isMine ? [{ number: me, name: message.name }] : await view.people();
+  const people = new Map(all.map((person) => [person.number, person]));
   return { ...here, vessels, claims, plans, people };
 }
 
