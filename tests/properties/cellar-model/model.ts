@@ -30,6 +30,8 @@ export interface Model {
   /** The entries that a button has made. */
   readonly made: Map<string, number[]>;
   readonly claims: Map<string, Claimed>;
+  /** When it was last asked whether a volume is right, by who said it, where, and of which vessel. */
+  readonly askedVolumes: Map<string, number>;
   /** What people have on their screens. */
   readonly shown: Shown[];
   /** What was delivered, and whether it noted something. */
@@ -40,7 +42,16 @@ export interface Model {
 
 /** Nothing was said yet. */
 export function freshModel(now: number): Model {
-  return { now, log: [], made: new Map(), claims: new Map(), shown: [], delivered: [], story: [] };
+  return {
+    now,
+    log: [],
+    made: new Map(),
+    claims: new Map(),
+    askedVolumes: new Map(),
+    shown: [],
+    delivered: [],
+    story: [],
+  };
 }
 
 /** Notes something by the rules; `at` where it happened at another time than now. */

@@ -23,6 +23,24 @@ async function untoldSample(vessel: string, place: Place, { log, now }: Model, b
   return at;
 }
 
+/** A volume that was asked about is confirmed where the same person says it once more while the question waits. */
+async function isConfirmed(
+  vessel: string,
+  { volume_L }: Measured,
+  place: Place,
+  { log, now, askedVolumes }: Model,
+  bot: Bot,
+): Promise<boolean> {
+  if (volume_L === undefined) return false;
+  const name = `${place.person} ${place.chat} ${vessel} ${volume_L}`;
+  const asked_at = askedVolumes.get(name);
+  askedVolumes.set(name, now);
+  const entry = await bot.look((view) => view.entry(log.length + 1));
+  const isKept = entry?.kind === 'reading' && entry.volume_L === volume_L;
+  must(!isKept || (asked_at !== undefined && now - asked_at < 60 * MINUTE_ms), 'a volume that does not fit');
+  return isKept;
+}
+
 /** A question for a dose with all that it takes, or with as little as people write; perhaps of an earlier sample. */
 export function reads(vessel: VesselName, measured: Measured, place: Place, minutes?: number): Move {
   return {
@@ -46,6 +64,7 @@ export function reads(vessel: VesselName, measured: Measured, place: Place, minu
       const fits =
         volume_L !== undefined &&
         (typeof known?.volume_L !== 'number' || Math.abs(volume_L / known.volume_L - 1) <= 0.05);
+      const isKept = fits || (await isConfirmed(vessel, measured, place, model, bot));
       const { entry } = note(
         model,
         {
@@ -53,7 +72,7 @@ export function reads(vessel: VesselName, measured: Measured, place: Place, minu
           vessel,
           free_mg_L,
           ...(ph !== undefined && { ph }),
-          ...(fits && { volume_L }),
+          ...(isKept && volume_L !== undefined && { volume_L }),
           ...(isWhole && { stage: 'over' as const }),
         },
         place,
