@@ -33,7 +33,8 @@ export function notesOfReading(reading: Reading, here: Here): Note[] {
   const isTold = Object.keys(traits).length > 0 || volume_L !== undefined;
   if (!isTold || intent !== 'dose') return [];
   const happening: VesselChange = { kind: 'vessel', event: 'told', ...beside };
-  return [{ happening, at }];
+  // What a button tells of the wine is told when it is pressed.
+  return [{ happening, at: reading.said_at === undefined ? at : here.message.at }];
 }
 
 /** When something last went into one of these vessels, in milliseconds since 1970. */

@@ -35,9 +35,11 @@ export async function handlePress(key: string, here: Here, view: CellarView): Pr
   const button = parseKey(key);
   if (button?.does === 'i') return takeImport(button.ref, here, view);
   const kept = button && (await view.kept(readingKey(message.chat, button.ref)));
-  const found = kept === undefined ? undefined : (JSON.parse(kept) as Remembered);
+  const remembered = kept === undefined ? undefined : (JSON.parse(kept) as Remembered);
   // A button is for those who see it.
-  if (!button || found?.chat !== message.chat) return saying(settings, [line('first', 'old-button')]);
+  if (!button || remembered?.chat !== message.chat) return saying(settings, [line('first', 'old-button')]);
+  const { reading, at } = remembered;
+  const found: Remembered = { ...remembered, reading: { ...reading, said_at: reading.said_at ?? at } };
   const near = await withVessels(here, view, vesselsIn(found.reading.fields));
   switch (button.does) {
     case 'a':

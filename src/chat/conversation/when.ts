@@ -13,9 +13,12 @@ export type When =
   | { readonly is: 'noon'; readonly at: number }
   | { readonly is: 'future' | 'no-such-day'; readonly at: number };
 
-/** When a reading was sampled, or an addition made: as it was said, else when the message was sent. */
-export function whenOf({ when, sampled }: Reading, here: Here, lastAddedAt?: number): When {
-  const { at } = here.message;
+/**
+ * When a reading was sampled, or an addition made: as it was said, else when it was said. A button that is pressed later
+ * makes no sample younger.
+ */
+export function whenOf({ when, sampled, said_at }: Reading, here: Here, lastAddedAt?: number): When {
+  const at = said_at ?? here.message.at;
   if (sampled === 'before' && lastAddedAt !== undefined && when?.hour === undefined)
     return { is: 'told', at: lastAddedAt - MINUTE_ms };
   if (when === undefined) return { is: 'now', at };

@@ -184,6 +184,8 @@ export interface Reading {
   readonly noted?: readonly FieldName[];
   /** The key of the event that noted them, when buttons of the reading may still move its time. */
   readonly event?: string;
+  /** When it was said, in milliseconds since 1970, where a button goes on with it later; else with its message. */
+  readonly said_at?: number;
   /** Whether the sample was taken before or after the last addition, where that was asked; `dose` wants one all the same. */
   readonly sampled?: 'before' | 'after' | 'dose';
   /** What else was read that steers what is asked. */

@@ -29,21 +29,29 @@ interface Dosed {
  */
 export function dosedAlready(reading: Reading, turn: Turn): Outcome | undefined {
   const { here } = turn;
-  if (reading.sampled === 'dose') return undefined;
   const sample = whenOf(reading, here);
+  if (reading.sampled === 'dose') return dosedSince(reading, turn, sample.at);
   // One whole day after it, it counts no more.
   const dosed = lastDosed(reading, turn, Math.min(sample.at, here.message.at - DAY_ms));
   if (dosed === undefined) return undefined;
   const { free_mg_L } = saidFields(reading);
   if (free_mg_L === undefined) return asked(reading, dosed, 'dosed-add-more', ['gd'], turn);
-  const isTold = sample.is === 'told' || reading.sampled !== undefined;
+  // What went in after it was said is surely later than the sample.
+  const isOlder = reading.said_at !== undefined && reading.said_at < dosed.addition.at;
+  const isTold = sample.is === 'told' || reading.sampled !== undefined || isOlder;
   if (isTold && (sample.at < dosed.addition.at || reading.sampled === 'before'))
     return asked(reading, dosed, 'dosed-sampled-before', [], turn);
   if (isTold) return landedToday(reading, dosed, free_mg_L, turn);
   return asked(reading, dosed, 'dosed-which-first', ['gb', 'ga'], turn);
 }
 
-/** The last addition to one of the vessels at or after a moment. */
+/** A dose was wanted all the same; what went in after that was said, nobody knew of. */
+function dosedSince(reading: Reading, turn: Turn, sampled_at: number): Outcome | undefined {
+  const dosed = lastDosed(reading, turn, Math.max(sampled_at, reading.said_at ?? sampled_at));
+  return dosed && asked(reading, dosed, 'dosed-sampled-before', [], turn);
+}
+
+/** The last addition to one of the vessels after a moment. */
 function lastDosed(reading: Reading, { here }: Turn, since: number): Dosed | undefined {
   const all = vesselsIn(reading.fields).flatMap((name): Dosed[] => {
     const vessel = here.vessels.get(name);

@@ -41,10 +41,8 @@ export async function noteDose(found: Remembered, here: Here, view: CellarView):
 /** "Note it" under an addition whose amount was worked out. */
 export async function noteWorkedOut(found: Remembered, here: Here, view: CellarView): Promise<Handled> {
   const { reading } = found;
-  // When it was told, not when the button was pressed.
-  const then = { ...here, message: { ...here.message, at: found.at } };
-  const happening = additionOf(reading, added(toAddedRequest(reading)), then);
-  const { at } = whenOf(reading, then);
+  const happening = additionOf(reading, added(toAddedRequest(reading)), here);
+  const { at } = whenOf(reading, here);
   return noteOnce({ happening, at }, buttonKey('note', found.chat, found.ref), here, view);
 }
 
