@@ -79,7 +79,7 @@ const move: fc.Arbitrary<Move> = fc.oneof(
   {
     weight: 2,
     arbitrary: fc
-      .tuple(vessel, vessel, place, fc.constantFrom(undefined, 700, 2000, 'blend' as const))
+      .tuple(vessel, vessel, place, fc.constantFrom(undefined, 700, 2000, 3600, 'blend' as const))
       .map((all) => vessels.pours(...all)),
   },
   { weight: 2, arbitrary: place.map((who) => corrections.undoes(who)) },
@@ -98,6 +98,7 @@ const move: fc.Arbitrary<Move> = fc.oneof(
       .tuple(fc.constantFrom('gb' as const, 'ga' as const, 'gd' as const), pick, place)
       .map((all) => readings.answersSampled(...all)),
   },
+  { weight: 3, arbitrary: fc.tuple(pick, place).map((all) => readings.wantsAnotherTarget(...all)) },
   { weight: 2, arbitrary: fc.tuple(pick, place).map((all) => corrections.pressesUndo(...all)) },
   { weight: 3, arbitrary: fc.tuple(pick, place).map((all) => buttons.pressesDone(...all)) },
   { weight: 3, arbitrary: fc.tuple(pick, place).map((all) => claims.claims(...all)) },

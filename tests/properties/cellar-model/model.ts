@@ -12,6 +12,10 @@ export interface Shown {
   readonly mass_g?: number;
   /** When the addition above it was told. */
   readonly told_at?: number;
+  /** When the sample above it was taken, when that was said, and whether a dose was wanted all the same. */
+  readonly sampled_at?: number;
+  readonly said_at?: number;
+  readonly isAnyway?: boolean;
   /** The entry of the reading that it stands under. */
   readonly reading?: number;
 }

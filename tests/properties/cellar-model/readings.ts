@@ -1,3 +1,4 @@
+import type { Said } from '../../../src/chat/replies/say.ts';
 import { textOf, type Bot, type Place } from './bot.ts';
 import { picked } from './buttons.ts';
 import { note, type Model, type Shown } from './model.ts';
@@ -78,7 +79,7 @@ export function reads(vessel: VesselName, measured: Measured, place: Place, minu
         place,
         sampled_at,
       );
-      shows(said, place.chat, { vessel, reading: entry }, model);
+      shows(said, place.chat, { vessel, reading: entry, sampled_at, said_at: model.now }, model);
       const isDosed = before !== undefined && (before.at > sampled_at || before.at > model.now - DAY_ms);
       const gives = said.some(({ buttons }) => buttons.some(({ key }) => key.startsWith('a:')));
       if (isDosed) {
@@ -113,14 +114,11 @@ export function answersSampled(does: 'gb' | 'ga' | 'gd', pick: number, place: Pl
     play: async (model, bot) => {
       const button = picked(does, place.chat, pick, model)!;
       const said = await presses(button.key, place, model, bot);
-      shows(
-        said,
-        place.chat,
-        { vessel: button.vessel, ...(button.reading !== undefined && { reading: button.reading }) },
-        model,
-      );
+      const { key: _key, chat: _chat, shown_at: _shown, mass_g: _mass, ...about } = button;
+      shows(said, place.chat, { ...about, isAnyway: about.isAnyway ?? does === 'gd' }, model);
       if (does !== 'gd')
         must(!hadAddition(model, button.vessel) || !/weigh/.test(textOf(said)), `a dose: ${textOf(said)}`);
+      mustNotBeOld({ ...button, isAnyway: true }, said, model);
       if (does === 'gb') await movedBefore(button, place, model, bot);
     },
   };
@@ -129,6 +127,27 @@ export function answersSampled(does: 'gb' | 'ga' | 'gd', pick: number, place: Pl
 function hadAddition({ log, now }: Model, vessel: string): boolean {
   const last = lastAddition(log, vessel);
   return last !== undefined && last.at > now - 1440 * MINUTE_ms;
+}
+
+/** No dose comes of a sample that something went in after, unless one was wanted all the same and nothing did since. */
+function mustNotBeOld(button: Shown, said: readonly Said[], { log, now }: Model): void {
+  const { vessel, sampled_at = 0, said_at = 0, isAnyway } = button;
+  const { at = 0 } = lastAddition(log, vessel) ?? {};
+  const since = isAnyway ? Math.max(sampled_at, said_at) : Math.min(sampled_at, now - DAY_ms);
+  must(at <= since || !/weigh/.test(textOf(said)), `a dose of an old sample: ${textOf(said)}`);
+}
+
+/** "Another target" under a dose, however long ago, and a figure. */
+export function wantsAnotherTarget(pick: number, place: Place): Move {
+  return {
+    name: 'wants another target',
+    can: (model) => picked('a', place.chat, pick, model)?.said_at !== undefined,
+    play: async (model, bot) => {
+      const button = picked('a', place.chat, pick, model)!;
+      await presses(`t${button.key.slice(1)}`, place, model, bot);
+      mustNotBeOld(button, await writes('33', place, model, bot), model);
+    },
+  };
 }
 
 /** The reading is taken back and noted anew at a time before the addition; which time, the program chooses. */

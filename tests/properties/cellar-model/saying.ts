@@ -4,7 +4,7 @@ import { textOf, type Bot, type Place } from './bot.ts';
 import type { Model, Shown } from './model.ts';
 
 /** What a reply is about, for its buttons. */
-export type About = Pick<Shown, 'vessel' | 'reading' | 'mass_g' | 'told_at'>;
+export type About = Omit<Shown, 'key' | 'chat' | 'shown_at'>;
 
 /** Somebody writes. */
 export function writes(text: string, place: Place, model: Model, bot: Bot): Promise<readonly Said[]> {
