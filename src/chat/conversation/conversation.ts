@@ -61,7 +61,7 @@ async function handleAddressed(here: Here, view: CellarView): Promise<Handled> {
   const handled = await permit(await handleContent(content, done, view), done, view);
   if (here.role === undefined) return { writes: [], replies: handled.replies };
   const notes = handled.writes.some(({ kind }) => kind === 'entry');
-  const daily = notes ? await scheduleDaily(done, view) : [];
+  const daily = notes && here.daily === undefined ? await scheduleDaily(done, view) : [];
   return greeted(
     { ...handled, writes: [...handled.writes, ...daily, ...rememberingNoted(handled, here)] },
     done,

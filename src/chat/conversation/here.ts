@@ -1,6 +1,15 @@
 import type { CellarView, Person } from '../../core/cellar/cellar-store.ts';
 import type { Vessel } from '../../core/cellar/vessel.ts';
-import { claimKey, memoryKey, planKey, ROSTER_KEY, SETTINGS_KEY, ZONE_ASKED_KEY } from './keys.ts';
+import {
+  claimKey,
+  dailyKey,
+  memoryKey,
+  notedKey,
+  planKey,
+  ROSTER_KEY,
+  SETTINGS_KEY,
+  ZONE_ASKED_KEY,
+} from './keys.ts';
 import { roleOf } from './cellar/role-of.ts';
 import { readRoster, type Role, type Roster } from './cellar/roster.ts';
 import { FRESH_MEMORY, type Memory } from './memory.ts';
@@ -41,6 +50,10 @@ export interface Here extends CellarFacts {
   readonly nextEntry: number;
   /** Whether the time zone was asked for before. */
   readonly isZoneAsked: boolean;
+  /** The id of the next daily list of this chat, once it is set. */
+  readonly daily?: string;
+  /** The entry that the same event has noted before under another key than its own. */
+  readonly notedEntry?: number;
   /** The keys of what the same event has noted before: it is delivered again. */
   readonly done: ReadonlySet<string>;
   /** What the event's entries are named by, where that is not the event itself. */
@@ -51,8 +64,17 @@ export interface Here extends CellarFacts {
 export async function arrive(message: IncomingMessage, view: CellarView, defaults: Settings): Promise<Here> {
   const known = await view.person(message.person);
   // In one look: every message asks for these.
-  const all = await view.keptOf([memoryKey(message), SETTINGS_KEY, ROSTER_KEY, ZONE_ASKED_KEY]);
+  const all = await view.keptOf([
+    memoryKey(message),
+    SETTINGS_KEY,
+    ROSTER_KEY,
+    ZONE_ASKED_KEY,
+    dailyKey(message.chat),
+    notedKey(message),
+  ]);
   const kept = all.get(memoryKey(message));
+  const daily = all.get(dailyKey(message.chat));
+  const noted = all.get(notedKey(message));
   const set = all.get(SETTINGS_KEY);
   const people = known === undefined ? await view.people() : [];
   const me = known?.number ?? Math.max(0, ...people.map(({ number }) => number)) + 1;
@@ -68,6 +90,8 @@ export async function arrive(message: IncomingMessage, view: CellarView, default
     isNewPerson: known === undefined || (message.name !== undefined && known.name !== message.name),
     nextEntry: await view.nextEntry(),
     isZoneAsked: all.has(ZONE_ASKED_KEY),
+    ...(daily !== undefined && { daily }),
+    ...(noted !== undefined && { notedEntry: Number(noted) }),
     done: new Set(),
   };
 }

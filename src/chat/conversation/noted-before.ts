@@ -11,13 +11,12 @@ import type { Handled } from './ports.ts';
  */
 export async function notedBefore(
   entries: readonly LoggedEntry[],
-  { message }: Here,
+  { notedEntry }: Here,
   view: CellarView,
 ): Promise<LoggedEntry | undefined> {
   const fact = entries.find(({ kind }) => kind !== 'reading' && kind !== 'vessel');
   if (fact) return fact;
-  const number = await view.kept(notedKey(message));
-  return number === undefined ? undefined : view.entry(Number(number));
+  return notedEntry === undefined ? undefined : view.entry(notedEntry);
 }
 
 /** The write that remembers which entry an event has noted under another key than its own. */
