@@ -59,11 +59,15 @@ function quoted(terms: readonly Term[], i: number): Range | undefined {
   return isBeside && !isName ? { at: i, from: i + 1, to: end - 1, until: end + 1 } : undefined;
 }
 
+const BRACKETS: ReadonlySet<string> = new Set(['(', ')']);
+
 /** Words in brackets that are no figures and say nothing of the wine that is known. */
 function bracketed(terms: readonly Term[], i: number): Range | undefined {
   if (termIn(terms, i).kind !== 'mark' || termIn(terms, i).text !== '(') return undefined;
-  const end = terms.findIndex((term, k) => k > i && term.text === ')');
-  if (end <= i + 1) return undefined;
+  // Only the innermost brackets: a text of nothing but brackets is gone through once.
+  let end = i + 1;
+  while (end < terms.length && !BRACKETS.has(termIn(terms, end).text)) end++;
+  if (end <= i + 1 || terms[end]?.text !== ')') return undefined;
   const inside = terms.slice(i + 1, end);
   const isPlain = inside.every(
     ({ kind, tags }) => kind !== 'number' && !tags.some((tag) => SPEAKS.test(tag)),
