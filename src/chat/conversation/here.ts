@@ -52,8 +52,8 @@ export interface Here extends CellarFacts {
   readonly isZoneAsked: boolean;
   /** The id of the next daily list of this chat, once it is set. */
   readonly daily?: string;
-  /** The entry that the same event has noted before under another key than its own. */
-  readonly notedEntry?: number;
+  /** The number of the entry that the same event has noted before under another key than its own, as it is kept. */
+  readonly noted?: string;
   /** The keys of what the same event has noted before: it is delivered again. */
   readonly done: ReadonlySet<string>;
   /** What the event's entries are named by, where that is not the event itself. */
@@ -91,7 +91,7 @@ export async function arrive(message: IncomingMessage, view: CellarView, default
     nextEntry: await view.nextEntry(),
     isZoneAsked: all.has(ZONE_ASKED_KEY),
     ...(daily !== undefined && { daily }),
-    ...(noted !== undefined && { notedEntry: Number(noted) }),
+    ...(noted !== undefined && { noted }),
     done: new Set(),
   };
 }

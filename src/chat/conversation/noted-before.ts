@@ -11,12 +11,12 @@ import type { Handled } from './ports.ts';
  */
 export async function notedBefore(
   entries: readonly LoggedEntry[],
-  { notedEntry }: Here,
+  { noted }: Here,
   view: CellarView,
 ): Promise<LoggedEntry | undefined> {
   const fact = entries.find(({ kind }) => kind !== 'reading' && kind !== 'vessel');
   if (fact) return fact;
-  return notedEntry === undefined ? undefined : view.entry(notedEntry);
+  return noted === undefined ? undefined : view.entry(Number(noted));
 }
 
 /** The write that remembers which entry an event has noted under another key than its own. */
