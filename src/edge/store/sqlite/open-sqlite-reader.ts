@@ -5,6 +5,7 @@ import { asOperatorError } from './as-operator-error.ts';
 import { createSqliteReader, type CellarReader } from './create-sqlite-reader.ts';
 import { readVersion } from './migrate.ts';
 import { MIGRATIONS } from './migrations/migrations.ts';
+import { isProjectionNew } from './renew-projection.ts';
 import { callSqlite } from './sqlite-fault.ts';
 
 const PATIENCE_ms = 1000;
@@ -23,7 +24,7 @@ export async function openSqliteReader(
   try {
     const opened = callSqlite(() => new DatabaseSync(path, { readOnly: true, timeout: PATIENCE_ms }));
     reader = opened;
-    if (readVersion(opened, path) < MIGRATIONS.length)
+    if (readVersion(opened, path) < MIGRATIONS.length || !isProjectionNew(opened))
       throw new OperatorError(`${path} is of an older form: start brimnote with it once, then read it.`);
     return { ...createSqliteReader({ path, reader: opened, now }), close: async () => opened.close() };
   } catch (error) {

@@ -9,6 +9,7 @@ import { checkNotOrphaned, fileSize, findDamage } from './check-file.ts';
 import { createSqliteStore } from './create-sqlite-store.ts';
 import { migrate, readVersion } from './migrate.ts';
 import { realPath } from './real-path.ts';
+import { renewProjection } from './renew-projection.ts';
 import { callSqlite } from './sqlite-fault.ts';
 import { lockForWriting } from './writer-lock.ts';
 
@@ -56,6 +57,7 @@ export async function openSqliteStore(path: string, options: SqliteStoreOptions)
     toClose.push(() => reader.close());
 
     const store = createSqliteStore({ path: file, writer, reader, now: options.now, close });
+    await renewProjection(writer, store);
     if (isLarge)
       toClose.push(
         checkAside(file, (found) => {

@@ -1,0 +1,5 @@
+/**
+ * Which rule `applyEntry` follows, a plain count. Raise it by one with every change of what an entry does to a vessel or
+ * of how a vessel is kept: a store that holds vessels by another rule derives them anew when it is opened.
+ */
+export const PROJECTION_VERSION = 1;
