@@ -253,6 +253,11 @@ fact-product = { $product ->
        *[fruit-wine] fruit wine
     }
 fact-organic = organic
+fact-designated = designated ({ $limit })
+fact-uplift = declared year
+fact-quality = quality sparkling
+fact-density = density { $density } kg/L
+fact-reserve = { $reserve } kept for bottling
 fact-stage = { stage-now }
 fact-target = aim { target }
 fact-tablet =
@@ -474,7 +479,85 @@ chat-help-effect-means = → what an amount adds
 chat-help-solution = make 5 L of 10% kmbs
 chat-help-solution-means = → how to make a stock
 chat-help-fields = Any order; also total, red, 13.5%, target 35, +25 ppm, +30%, smbs. Tanks: a line each.
+chat-help-topics = More: help and one of { $list }.
 chat-help-care = The label, your local rules and a qualified person come first.
+
+## Help by topic: each a screen of messages to send; `help-<topic>-…` in the order in which they are said
+
+help-wine-1 = In any order: the vessel, its volume, pH, free SO2.
+help-wine-2 = T4 1450 gal pH 3.58 free 21 white → what to weigh out
+help-wine-3 = T4 40 hl 3.6/18/60 13.5% 14 C → pH, free and total SO2
+help-wine-4 = T4 40 hl pH 3.5 free 18 0.6 molecular → to a level of your own; or target 36
+help-wine-5 = T4 40 hl add 25 ppm → a stated addition
+help-wine-6 = T4 40 hl pH 3.5 free 18 +30% → more, for what binds; or: a third binds
+help-wine-7 = T4 40 hl pH 3.5 free 18, 10% kmbs → from a solution; also smbs, 6% so2, 5 g tabs
+help-wine-8 = 100 g kmbs in 20 hl → what an amount adds
+help-wine-9 = Red, rosé, sweet, cider, mead, organic; must, fermenting, ML done: say what it is, or the reply says what it took.
+help-log-1 = Nothing is deleted; corrections stand beside what they correct.
+help-log-2 = added 82 g kmbs T4 → noted; also ppm, mL, yesterday 17:00, lot 4471, note: …
+help-log-3 = T4 now free 28 total 96 → a reading kept, without a dose
+help-log-4 = order T4 256 g kmbs → for somebody else to do; open shows what is not done yet
+help-log-5 = today → what was noted today; also yesterday, 12 Nov
+help-log-6 = T4 history → all that is noted of it
+help-log-7 = undo → takes back your own last, within 15 minutes
+help-log-8 = strike 17 typo → takes back entry 17, and says why
+help-vessels-1 = What happens to a wine changes what I still count on.
+help-vessels-2 = T4? → what I know of it
+help-vessels-3 = vessels → all of them
+help-vessels-4 = T4 red → also in malo, finished
+help-vessels-5 = T4 is 5200 L now → what is in it; T4 holds 6000 L: its size
+help-vessels-6 = racked T4 6100 L → also topped T4
+help-vessels-7 = moved T4 to T9 → the whole of it, or 20 hl of it
+help-vessels-8 = blended T5 into T4 → the pH has to be measured anew
+help-vessels-9 = T4 = Blanca 2026 → the name of its wine
+help-vessels-10 = T4 empty → also: forget T4
+help-reminders-1 = I say once a day what to measure, and after an addition when.
+help-reminders-2 = due → what to measure now
+help-reminders-3 = daily list at 7:00 → when I say it; or: daily list off
+help-reminders-4 = later T4 3 days → asks for it later
+help-reminders-5 = not T4 → no more of it; watch T4: again
+help-reminders-6 = quiet 21 to 6 → nothing unasked at night
+help-settings-1 = All of this holds for the whole cellar.
+help-settings-2 = settings → what is set, and how to change each
+help-settings-3 = units us → also metric, imperial
+help-settings-4 = our usual is smbs → the additive where none is named
+help-settings-5 = target 0.5 for reds → also whites, sweets
+help-settings-6 = allowance 30% → added to every dose, for what binds
+help-settings-7 = time zone Europe/Madrid → for hours and days
+help-settings-8 = short replies → the working on a button
+help-pictures-1 = A picture shows free, molecular and total SO2, and what went in.
+help-pictures-2 = picture T4 → as a photo, with the same in words
+help-files-1 = Your log is yours.
+help-files-2 = export → this month as a spreadsheet
+help-files-3 = export 2026 → also export T4 csv, export 1 Oct to 31 Oct
+help-files-4 = An export of another cellar, or a list of vessels as CSV or XLSX: send the file. It is shown first, then taken whole or not at all.
+help-people-1 = A group is a cellar of its own: call me by my name, or reply to me.
+help-people-2 = people → who is in
+help-people-3 = invite hand → a code for one person; also keeper, guest
+help-people-4 = A keeper may do everything, a hand doses and logs, a guest looks.
+help-people-5 = read along → I answer plain readings uncalled
+help-people-6 = at → which cellar we are in; at Blanca: another one
+help-people-7 = forget me → your name and number come off
+help-topic =
+    { $topic ->
+        [wine] wine
+        [must] must
+        [bottling] bottling
+        [law] law
+        [round] round
+        [stock] stock
+        [solutions] solutions
+        [log] log
+        [vessels] vessels
+        [reminders] reminders
+        [settings] settings
+        [pictures] pictures
+        [files] files
+        [people] people
+        [lab] lab
+       *[other] { $topic }
+    }
+
 send-alone = That goes in a message of its own.
 unreadable =
     { $what ->
@@ -1190,6 +1273,7 @@ export-total_mg_L = Total SO2 mg/L
 export-temperature_C = Temperature °C
 export-alcohol_percent = Alcohol % vol
 export-sugar_g_L = Sugar g/L
+export-over_rule = Over the limit of
 export-order = Carries out order no.
 export-remark = Remark
 export-corrects = Takes back no.
@@ -1208,6 +1292,11 @@ export-category = Sort
 export-product = Product
 export-organic = Organic
 export-stage = Stage
+export-designated_mg_L = Designated, limit mg/L
+export-uplift = Declared year
+export-quality = Quality sparkling
+export-density_kg_L = Density kg/L
+export-reserve_mg_L = Kept for bottling mg/L
 export-lot = Lot told
 export-capacity_L = Capacity L
 export-until = Until

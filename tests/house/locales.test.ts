@@ -2,6 +2,7 @@ import { existsSync, readFileSync, readdirSync } from 'node:fs';
 import { describe, expect, test } from 'vitest';
 import { localeMessages, referredTo } from '../../.ci/locale-messages.ts';
 import type { LocaleMessages } from '../../.ci/locale-messages.ts';
+import { helpKeys } from '../../.ci/help-keys-of.ts';
 import { sentenceKeys } from '../../.ci/sentence-keys-of.ts';
 import { parse, sourceFiles } from './source-file.ts';
 import type { SourceFile } from './source-file.ts';
@@ -59,6 +60,7 @@ describe('sentences and code belong together', () => {
 
   test('the list of keys that the types are made from is up to date: else run node .ci/sentence-keys.ts', () => {
     expect(existsSync(KEYS_FILE) ? readFileSync(KEYS_FILE, 'utf8') : '').toBe(sentenceKeys(english));
+    expect(readFileSync('src/chat/replies/help-keys.ts', 'utf8')).toBe(helpKeys(english));
   });
 });
 

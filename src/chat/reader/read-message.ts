@@ -4,6 +4,7 @@ import { finishReading } from './finish-reading.ts';
 import type { FoldedText } from './fold-text.ts';
 import { emptyReading } from './empty-reading.ts';
 import { foldText } from './fold-text.ts';
+import { helpTopicOf } from './help-topic.ts';
 import { joinNumbers } from './join-numbers.ts';
 import { LEXICON } from './lexicon.ts';
 import { linesOf } from './lines.ts';
@@ -11,6 +12,7 @@ import { groupingOf } from './message-language.ts';
 import { ownPieces } from './own-pieces.ts';
 import { readDraft } from './read-draft.ts';
 import { readRound } from './read-round.ts';
+import { questionTopic } from './question-topic.ts';
 import type { Term } from './split-terms.ts';
 import { splitTerms } from './split-terms.ts';
 import { takeRemark } from './take-remark.ts';
@@ -69,7 +71,14 @@ export function setBoard(
 }
 
 function readOne(board: Board, settings: ReaderSettings): Reading {
+  const help = helpTopicOf(board);
+  if (help !== undefined) return emptyReading('chat', { topic: `help-${help}` });
   const draft = readDraft(board);
+  const question = questionTopic(
+    board.terms.flatMap(({ kind, text }) => (kind === 'break' ? [] : [text])),
+    draft,
+  );
+  if (question !== undefined) return emptyReading('chat', { topic: question });
   if (draft.intent !== 'chat') return finishReading(draft, settings);
   const topic = topicOf(board);
   if (topic !== undefined) return emptyReading('chat', { topic });

@@ -372,6 +372,14 @@ export const en: Words = {
       'kmbs', 'lees', 'blend', 'racking', 'vintage', 'batch', 'lot', 'carboy', 'demijohn', 'keg', 'tote',
       'ibc', 'drum', 'jug', 'bucket', 'flexcube', 'egg', 'amphora', 'vat', 'fermenter', 'fermentor',
     ],
+    'cue:designated': ['designated', 'designation', 'designated sweet', 'designated sweet wine', 'designated wine', 'designated limit', 'designation limit'],
+    'cue:declared-year': ['declared year', 'declared bad year', 'declared a bad year', 'bad year declared', 'year declared', 'year is declared', 'in a declared year', 'declared uplift', 'uplift declared'],
+    'cue:density': ['density', 'wine density'],
+    'cue:density-unit': ['kg l', 'g ml', 'g cm3', 'kg dm3'],
+    'cue:quality': ['quality sparkling', 'quality sparkling wine'],
+    'cue:keep': ['keep', 'keep back', 'hold back', 'set aside', 'reserve', 'save', 'leave', 'leave room for', 'keep room for'],
+    'cue:bottling': ['bottling'],
+    'cue:bottling-reserve': ['bottling reserve', 'reserve for bottling', 'kept for bottling'],
     'cue:bottle-unit': ['bottle', 'bottles', 'btl', 'btls', 'magnum', 'magnums'],
     'cue:plain': [
       'the', 'a', 'an', 'and', 'or', 'is', 'are', 'was', 'in', 'on', 'at', 'for', 'with', 'pls', 'please',
@@ -416,6 +424,7 @@ export const en: Words = {
       'icewine',
     ],
     'category:sparkling': [
+      'quality sparkling', 'quality sparkling wine',
       'sparkling', 'sparkler', 'fizz', 'sparkling wine', 'bubbly', 'petnat', 'pet nat', 'bubbles', 'sparklng',
       'semi sparkling', 'spumante', 'cremant',
     ],
@@ -529,6 +538,26 @@ export const en: Words = {
       'bicarb', 'khco3', 'thiosulfate', 'sodium thiosulfate', 'potassium thiosulfate', 'sulfate of potash',
       'kmno4', 'potassium permanganate', 'potassium hydroxide', 'salt', 'dry ice', 'argon', 'nitrogen',
       'inert gas', 'sulfonate', 'dithionite', 'bleach', 'chlorine', 'sodium sulfite', 'sodium sulphite', 'potassium sulfite', 'potassium sulphite', 'na2so3', 'k2so3', 'calcium sulfite', 'magnesium sulfite', 'e220', 'e221', 'e222', 'e225', 'e226', 'e227', 'e211', 'e202', 'e300', 'e330', 'e334', 'e336', 'k2co3', 'caco3', 'nahco3', 'nacl', 'k2so4', 'k2s2o8', 'na2s2o3', 'h2so4', 'magnesium metabisulfite', 'magnesium metabisulphite', 'calcium metabisulfite', 'calcium metabisulphite', 'ammonium metabisulfite', 'metabisulfide', 'metabisulphide', 'potassium metabisulfide', 'potassium metabisulphide', 'potassium caseinate', 'caseinate', 'potassium bitartrate', 'bitartrate', 'potassium tartrate', 'potassium chloride', 'diatomaceous earth', 'perlite', 'dry yeast', 'cellulose', ],
+  },
+  topics: {
+    wine: ['wine', 'wines', 'dose', 'doses', 'dosing', 'reading', 'readings', 'addition', 'additions', 'sulfite', 'sulphite', 'so2', 'targets'],
+    must: ['must', 'juice', 'grapes', 'fruit', 'crush', 'press', 'pressing', 'harvest', 'yield'],
+    bottling: ['bottling', 'bottle', 'bottles', 'oxygen', 'malolactic', 'restart'],
+    law: ['law', 'laws', 'limit', 'limits', 'legal', 'legal limit', 'legal limits', 'region', 'regions', 'rules', 'organic'],
+    round: ['round', 'rounds', 'weigh out sheet', 'list', 'barrels', 'barrel', 'many tanks', 'rates'],
+    stock: ['stock', 'store', 'chemical store', 'chemicals', 'inventory', 'received', 'additives', 'lots'],
+    solutions: [
+      'solution', 'solutions', 'stock solution', 'stock solutions', 'holding solution', 'holding solutions', 'holding', 'rinse', 'rinsing',
+      'sanitizing', 'sanitising', 'cleaning', 'equipment', 'discs', 'sulfur discs', 'sulphur discs', 'wicks', 'sulfur wicks', 'empty barrels',
+    ],
+    log: ['log', 'logging', 'history', 'undo', 'strike', 'entries', 'order', 'orders', 'corrections', 'mistakes'],
+    vessels: ['vessel', 'vessels', 'tank', 'tanks', 'racking', 'blending', 'topping'],
+    reminders: ['reminders', 'reminder', 'due', 'daily', 'daily list', 'watch'],
+    settings: ['settings', 'setting', 'units', 'zone', 'time zone'],
+    pictures: ['pictures', 'picture', 'chart', 'charts', 'graph', 'graphs', 'plot'],
+    files: ['files', 'file', 'export', 'import', 'backup', 'csv', 'xlsx', 'excel', 'spreadsheet'],
+    people: ['people', 'group', 'groups', 'invite', 'invitations', 'roles', 'cellars', 'privacy'],
+    lab: ['lab', 'laboratory', 'titration', 'titrations', 'burette', 'ripper', 'aeration', 'analysis'],
   },
   own: {
     filler: [
@@ -845,6 +874,107 @@ export const en: Words = {
       'phone', 'email', 'emails', 'text', 'texts', 'call', 'calls', 'message', 'messages', 'whatsapp', 'mail',
       'supplier', 'lab', 'customer', 'client', 'exit', 'light', 'drill', 'lighting', 'contact', 'number',
       'lights', 'shower', 'plan', 'doors', 'door', 'exits',
+    ],
+  },
+  questions: {
+    'stop-fermentation': [
+      'stop|stops|kill|kills|halt|arrest & ferment|fermentation|fermenting|yeast|yeasts',
+      'keep|bottle|leave & sweet|some sugar|residual sugar & sulfite|sulphite|so2|sulfur|meta & can|just|enough|will|if',
+    ],
+    sorbate: ['sorbate|sorbates'],
+    allergy: [
+      'allerg* & sulfite*|sulphite*|so2|sulfur|sulphur|wine',
+      'headache|headaches & sulfite*|sulphite*|so2|sulfur|sulphur|wine|wines',
+      'asthma*|people|pregnant|health|healthy|poisonous|toxic|hangover* & sulfite*|sulphite*|so2 & is|are|do|does|can|bad|dangerous|safe',
+    ],
+    gas: [
+      'so2 gas|sulfur dioxide gas|sulphur dioxide gas|gas cylinder|liquid so2|gas bottle|cylinder of so2 & can|who|is|do|does|how|may|need|what|training|allowed|dangerous|safely|handle',
+    ],
+    'potassium-or-sodium': [
+      'sodium|smbs|na meta|na-meta & potassium|kmbs|k meta|k-meta|pot meta',
+      'sodium|smbs|na meta|na-meta & can|why|is|ok|may|allowed|what|difference',
+    ],
+    law: [
+      'legal|legally|law|laws|allowed|permitted|maximum|max|regulation|regulations & so2|sulfite*|sulphite*|sulfur|sulphur|wine & what|whats|how|is|legal|which|does|limit|maximum|max & !training|gas',
+      'contains sulfites|contains sulphites|contain sulfites & label|labels|labelling|labeling|write|put|bottle',
+    ],
+    'stock-keeps': [
+      'how long|keep|keeps|still good|go weak|goes weak|go off|last|lasts|store & solution|stock|sulfurous water|sulphurous water|so2 water & !make',
+    ],
+    'wait-before-yeast': [
+      'yeast|inoculat*|pitch|pitching & so2|sulfite|sulphite|sulfiting|sulphiting|sulfited|sulphited|meta|kmbs|sulfur|sulphur & after|wait|when|how long|straight|before|between|24 hours',
+      'wait|how long|when & yeast|inoculat*|pitch|pitching & add|before|hours|crush',
+    ],
+    'after-malolactic': [
+      'malo|mlf|malolactic|ml & when|soon|wait|ok|should|how do i know|can i|how long & sulfite|sulphite|so2|sulfur|sulphur|meta|kmbs|add',
+    ],
+    'no-sulfite': [
+      'without|no|instead of|not using|skip & sulfite|sulfites|sulphite|sulphites|so2|sulfur|sulphur & can|what|is|do|possible|safe|happens|why|else & !sorbate|tablets|powder|small|sodium',
+      'really need|have to use|necessary|do i need|need to add|why add|why use & sulfite|sulfites|sulphite|sulphites|so2|sulfur|sulphur & !sorbate|training|gas|ph|measure|test|before bottling',
+    ],
+    'which-figure': [
+      'free & total|molecular|bound & which|what|whats|difference|counts|matters|look at|go by',
+      'bound so2|bound sulfur|bound sulphur|bound sulfite & what|whats|is|why|does',
+      'what does molecular|what is molecular|whats molecular|molecular so2 mean|what does free so2 mean|what is free so2',
+    ],
+    'which-yield': [
+      '57|57.6|57.5|58 & 50|yield|why|half',
+      'how much so2|how much sulfur|what share|what percent|what percentage|yield & in|of|for & meta|kmbs|metabisulfite|metabisulphite|k-meta|campden',
+    ],
+    'old-powder': [
+      'old|last year|last years|last year\'s|years|year|go off|goes off|expire*|clumpy|clumped|open all|keep|keeps|weaker|shelf life|lumpy|hard|gone off|still good|still ok & kmbs|meta|metabisulfite|metabisulphite|sulfite|sulphite|powder|bag|pot meta|campden & can|is|does|do|how long|still|what|was & !solution|stock|every|vat',
+    ],
+    'tablets-or-powder': [
+      'tablet|tablets|campden & powder|meta|kmbs|metabisulfite & better|or|good|instead|why|difference|same|crush|cheaper',
+      'powder & tablets|tablet & !g',
+    ],
+    teaspoons: [
+      'teaspoon|teaspoons|tsp|spoon|spoons|spoonful|tablespoon & how|can|what|is|does|use|weigh|many|measure',
+      'no balance|no scale|no scales|without a scale|without a balance|don\'t have a scale|dont have a scale & how|can|what',
+    ],
+    'strip-reads-otherwise': [
+      'strip|strips|titret|titrets|test kit|test kits & lab|accurate|trust|right|different|reliable|good|else',
+      'ripper & ao|a-o|aeration|lab|higher|lower|accurate|right|red|reds',
+      'which method|what method|best method|best way to measure|most accurate & so2|free|sulfite|sulphite|sulfur|sulphur',
+    ],
+    'fell-short': [
+      'why & lower|less|not|didn\'t|didnt|only|drop|drops|dropped|fall|fell|low & free|so2|you said|up|planned|target|addition',
+      'where & so2|sulfite|sulphite|sulfur|sulphur & go|gone|went|going & !tank',
+      'fell short|came up short|came in low|below target|less than planned|lower than planned|missed the target & why|what|how|happened',
+    ],
+    'how-often': [
+      'how often|every how|how many times|once a month|every week|every month|each week & measure|measured|test|check|so2|free & !racking|add a',
+    ],
+    'small-or-large': [
+      'small|little|bit|split|several|many & big|large|one|once|doses|dose|additions|why|not & or|better|should|why|can|instead & so2|sulfite|sulphite|sulfur|dose|doses|addition|additions|all in|racking & !powder|tablets',
+      'all in at once|all at once & can|is|should|bit|or & !drink',
+      'one big|one large & dose|addition|or',
+    ],
+    'when-to-measure': [
+      'when|how soon|how long|same day|after how|wait & measure|test|check|reading|retest|recheck & after|again|wait|same day|since|stable & !malo|mlf|yeast',
+    ],
+    'how-to-mix': [
+      'dissolve|dissolving|mix|stir|throw|sprinkle|pour & meta|kmbs|powder|sulfite|sulphite|so2|it in|tank|barrel & how|can|do|should|is|best|what',
+      'how do i add|how to add|how do you add|best way to add|best way to put|how do i put|how should i add & sulfite|sulphite|so2|meta|kmbs|powder|sulfur|sulphur',
+    ],
+    'ppm-and-mg-L': [
+      'ppm|parts per million & mg l|mg/l|mgl|milligrams|g/hl|difference|same',
+      'what\'s a ppm|whats a ppm|what is a ppm|what is ppm|what does ppm|what\'s ppm|whats ppm',
+      'how many mg|how many ppm|how much is one|how do i turn|how do you turn|convert & g/hl|g / hl|g hl|gram per hectolitre|grams per hectolitre',
+    ],
+    'pH-matters': [
+      'ph & why|what has|have to|really need|need to|matter|matters & so2|sulfite|sulphite|sulfur|sulphur|need|measure|matter|matters',
+    ],
+    bottling: [
+      'bottling|bottle & so2|free|sulfite|sulphite|sulfur|sulphur|addition & how much|should|when|do|lost|higher|loss & !sweet|label|without|gas',
+    ],
+    'which-target': [
+      '0.8|0.5|0.6|0.4|0.7|1.5 & molecular|red|reds|white|whites|rose|enough|mol & why|should|is|enough|what|or',
+      'which|what & molecular|target|free so2|level of free|level of so2|free sulfur & aim|should|use|for|good|have|right|need',
+    ],
+    'too-much': [
+      'too much|excess|over sulfited|oversulfited|over dosed|overdosed & so2|sulfite|sulphite|sulfur|sulphur|meta|it',
+      'lower|reduce|remove|get rid|take out|bring down|bring the free down|get the free down|smells of & so2|sulfite|sulphite|sulfur|sulphur|free|matches & how|can|does|what|wine',
     ],
   },
 };

@@ -28,7 +28,8 @@ export type CueId =
   | 'fruit' | 'wine' | 'verb' | 'pronoun' | 'month' | 'lot' | 'variety'
   | 'greeting' | 'thanks' | 'help' | 'cellar' | 'plain' | 'potassium' | 'sodium' | 'yet'
   | 'percent' | 'please' | 'in-store' | 'into' | 'clock-before' | 'no' | 'states' | 'plus' | 'times' | 'wick'
-  | 'should' | 'fullness' | 'share-word' | 'limit' | 'sample-word' | 'past-time' | 'put' | 'lately' | 'bag' | 'buy' | 'in-water-name' | 'solution-name' | 'per-barrel' | 'rises-too' | 'tap-too'; // prettier-ignore
+  | 'should' | 'fullness' | 'share-word' | 'limit' | 'sample-word' | 'past-time' | 'put' | 'lately' | 'bag' | 'buy' | 'in-water-name' | 'solution-name' | 'per-barrel' | 'rises-too' | 'tap-too'
+  | 'designated' | 'declared-year' | 'density' | 'density-unit' | 'quality' | 'keep' | 'bottling' | 'bottling-reserve'; // prettier-ignore
 
 /** What a word is. */
 export type Tag =
@@ -68,10 +69,22 @@ export type OwnWordId =
   | 'cellar-is' | 'name-cellar' | 'read-along' | 'only-called'
   | 'count-half' | 'count-1' | 'count-2' | 'count-3' | 'count-4' | 'count-5' | 'count-6'; // prettier-ignore
 
+/** The plain questions about the trade that people ask again and again. */
+export type QuestionId =
+  | 'small-or-large' | 'how-often' | 'which-figure' | 'which-yield' | 'tablets-or-powder' | 'old-powder'
+  | 'wait-before-yeast' | 'after-malolactic' | 'ppm-and-mg-L' | 'teaspoons' | 'fell-short' | 'strip-reads-otherwise'
+  | 'stop-fermentation' | 'sorbate' | 'allergy' | 'law' | 'gas' | 'potassium-or-sodium' | 'when-to-measure'
+  | 'how-to-mix' | 'pH-matters' | 'which-target' | 'stock-keeps' | 'too-much' | 'no-sulfite' | 'bottling'; // prettier-ignore
+
 /** The groups of words that together make an emergency; `emergency.ts` holds the rules. */
 export type DangerId =
   | 'down' | 'breathless' | 'person' | 'thing' | 'silent' | 'went-in' | 'hurt-eye' | 'swallowed' | 'drank' | 'vessel' | 'fell' | 'beside' | 'unwell' | 'mixed' | 'reactive' | 'smell' | 'place' | 'skin' | 'idiom'
   | 'gas' | 'leak' | 'alarm' | 'elsewhere' | 'burnt' | 'chemical'; // prettier-ignore
+
+/** A topic of help: the sentences `help-<topic>-…` are its screen. */
+export type HelpTopic =
+  | 'wine' | 'must' | 'bottling' | 'law' | 'round' | 'stock' | 'solutions' | 'log' | 'vessels' | 'reminders'
+  | 'settings' | 'pictures' | 'files' | 'people' | 'lab'; // prettier-ignore
 
 /**
  * All that people write in one language: data only. Entries are lower case without accents; an entry of
@@ -85,9 +98,16 @@ export interface Words {
   /** Ordinary words, other chemicals and words of other languages that are one letter from a cellar word and none. */
   readonly neverMended?: readonly string[];
   readonly own?: Readonly<Partial<Record<OwnWordId, readonly string[]>>>;
+  /** What help is asked about, in the order in which the topics are listed. */
+  readonly topics?: Readonly<Partial<Record<HelpTopic, readonly string[]>>>;
   /** The names of the months in their order, January first; each the whole word and what shortens it. */
   readonly months?: readonly (readonly string[])[];
   /** The days of the week in their order, Monday first; no shortening that is also another word. */
   readonly weekdays?: readonly (readonly string[])[];
   readonly danger: Readonly<Partial<Record<DangerId, readonly string[]>>>;
+  /**
+   * How the plain questions are put, the first that fits counts. Each entry is groups joined by ` & `, of each of which
+   * one way (`|` between them, `*` for the rest of a word) is in the message; a group behind `!` must not be in it.
+   */
+  readonly questions?: Readonly<Partial<Record<QuestionId, readonly string[]>>>;
 }

@@ -1,0 +1,15 @@
+// Made from locales/en.ftl by `node .ci/sentence-keys.ts`: change the locale, not this file.
+import type { SentenceKey } from './sentence-keys.ts';
+
+/** The sentences of help by topic, each topic a screen, in the order in which they are said. */
+// prettier-ignore
+export const HELP_KEYS: Readonly<Record<string, readonly SentenceKey[]>> = {
+  wine: ['help-wine-1', 'help-wine-2', 'help-wine-3', 'help-wine-4', 'help-wine-5', 'help-wine-6', 'help-wine-7', 'help-wine-8', 'help-wine-9'],
+  log: ['help-log-1', 'help-log-2', 'help-log-3', 'help-log-4', 'help-log-5', 'help-log-6', 'help-log-7', 'help-log-8'],
+  vessels: ['help-vessels-1', 'help-vessels-2', 'help-vessels-3', 'help-vessels-4', 'help-vessels-5', 'help-vessels-6', 'help-vessels-7', 'help-vessels-8', 'help-vessels-9', 'help-vessels-10'],
+  reminders: ['help-reminders-1', 'help-reminders-2', 'help-reminders-3', 'help-reminders-4', 'help-reminders-5', 'help-reminders-6'],
+  settings: ['help-settings-1', 'help-settings-2', 'help-settings-3', 'help-settings-4', 'help-settings-5', 'help-settings-6', 'help-settings-7', 'help-settings-8'],
+  pictures: ['help-pictures-1', 'help-pictures-2'],
+  files: ['help-files-1', 'help-files-2', 'help-files-3', 'help-files-4'],
+  people: ['help-people-1', 'help-people-2', 'help-people-3', 'help-people-4', 'help-people-5', 'help-people-6', 'help-people-7'],
+};
