@@ -1,8 +1,8 @@
 // Made from locales/en.ftl by `node .ci/sentence-keys.ts`: change the locale, not this file.
 import type { SentenceKey } from './sentence-keys.ts';
 
-/** The sentences of help by topic, each topic a screen, in the order in which they are said. */
 // prettier-ignore
+/** The sentences of help by topic, each topic a screen, in the order in which they are said. */
 export const HELP_KEYS: Readonly<Record<string, readonly SentenceKey[]>> = {
   wine: ['help-wine-1', 'help-wine-2', 'help-wine-3', 'help-wine-4', 'help-wine-5', 'help-wine-6', 'help-wine-7', 'help-wine-8', 'help-wine-9'],
   log: ['help-log-1', 'help-log-2', 'help-log-3', 'help-log-4', 'help-log-5', 'help-log-6', 'help-log-7', 'help-log-8'],
