@@ -3,7 +3,7 @@ import type { Settings } from '../../chat/conversation/settings.ts';
 import type { Say } from '../../chat/replies/say.ts';
 import type { CellarStore } from '../../core/cellar/cellar-store.ts';
 import type { AllowRule } from '../cellars/allow-rule.ts';
-import { isInside, makeDoor } from '../cellars/door.ts';
+import { isInside, makeDoor, type DoorOptions } from '../cellars/door.ts';
 import { createRateLimit } from '../cellars/rate-limit.ts';
 import { createRegistry } from '../cellars/registry.ts';
 import type { Clock } from '../clock.ts';
@@ -21,6 +21,8 @@ export interface ConversationParts {
   readonly store: CellarStore;
   readonly settings: Settings;
   readonly rule: AllowRule;
+  /** How fast somebody may write; absent: as usual. */
+  readonly paceOf?: DoorOptions['paceOf'];
   readonly clock: Clock;
   readonly log: Log;
 }
@@ -34,9 +36,9 @@ export interface Conversation extends Required<
 
 /** Joins the conversation with its door: which cellar a chat is in, and who comes in how fast. */
 export function joinConversation(parts: ConversationParts): Conversation {
-  const { handle, say, store, settings, rule, clock, log } = parts;
+  const { handle, say, store, settings, rule, clock, log, paceOf = createRateLimit() } = parts;
   const registry = createRegistry(store);
-  const door = makeDoor({ store, registry, rule, paceOf: createRateLimit(), handle });
+  const door = makeDoor({ store, registry, rule, paceOf, handle });
   const report = (err: unknown): void => log.error({ err }, 'an errand failed');
   const serving = { handle, say, store, settings, door };
   const runErrand = makeRunErrand({

@@ -4,8 +4,8 @@ import { makeSay } from '../../../src/chat/replies/say.ts';
 import { systemClock, type Clock } from '../../../src/edge/clock.ts';
 import { loadLocales } from '../../../src/edge/locales.ts';
 import { createLog } from '../../../src/edge/logging.ts';
-import { makeServeTurn } from '../../../src/edge/serve-message.ts';
 import { openSqliteStore } from '../../../src/edge/store/sqlite/open-sqlite-store.ts';
+import { joinConversation } from '../../../src/edge/telegram/join-conversation.ts';
 import { USUAL_LIMITS } from '../../../src/edge/telegram/pace.ts';
 import { serveTelegram } from '../../../src/edge/telegram/serve-telegram.ts';
 import { FakeBotApi, TOKEN, type Fault } from '../../edge/telegram/fake-bot-api.ts';
@@ -72,12 +72,23 @@ export async function runStorm(file: string, { updates, chats, second_ms }: Stor
   const lines: string[] = [];
   const store = await openSqliteStore(file, { now: clock.now, report: () => undefined });
   const say = makeSay(loadLocales());
-  const stopping = new AbortController();
-  const ended = serveTelegram({
-    serve: makeServeTurn({ handle, say, store, settings }),
+  const log = createLog({ level: 'trace', secret: TOKEN, to: { write: (line) => void lines.push(line) } });
+  const { serveDue: _, ...conversation } = joinConversation({
+    handle,
     say,
     store,
-    log: createLog({ level: 'trace', secret: TOKEN, to: { write: (line) => void lines.push(line) } }),
+    settings,
+    rule: { is: 'open' },
+    paceOf: () => 'fine',
+    clock,
+    log,
+  });
+  const stopping = new AbortController();
+  const ended = serveTelegram({
+    ...conversation,
+    say,
+    store,
+    log,
     clock,
     config: { botToken: TOKEN, botApiRoot: api.root },
     tell: (sentence) => void lines.push(sentence),
