@@ -1,3 +1,4 @@
+import type { Region } from '../../core/limits/region.ts';
 import type { Basis } from '../../core/wine.ts';
 import { READER_DEFAULTS } from '../reader/reader-defaults.ts';
 import type { ReaderSettings } from '../reader/understood.ts';
@@ -9,6 +10,8 @@ export type UnitSystem = 'metric' | 'us' | 'imperial';
 export interface Settings extends ReaderSettings {
   /** The table of dissociation constants to reckon with. */
   readonly basis: Basis;
+  /** The market whose law is asked. */
+  readonly region: Region;
   /** The system that rates are told in: grams per hectolitre, or per thousand gallons. */
   readonly units: UnitSystem;
   /** The cellar's time zone by its name; absent until somebody tells it, and then UTC is said. */
@@ -46,6 +49,7 @@ const UNITS_OF: Readonly<
 export const DEFAULT_SETTINGS: Settings = {
   ...READER_DEFAULTS,
   basis: 'pk-1.81',
+  region: 'oiv',
   units: 'metric',
   quiet: { from_minute: 20 * 60, to_minute: 6 * 60 },
   daily_minute: 7 * 60 + 30,

@@ -22,7 +22,7 @@ import type { AddedRequest } from './request.ts';
  * ```ts
  * added({ mass_g: 82, additive: { id: 'potassium-metabisulfite' } }).SO2_g // => 47.2558
  * added({ added_mg_L: 26, volume_L: 1000, additive: { id: 'potassium-metabisulfite' } }).mass_g // => 45.116
- * added({ added_mg_L: 26 }) // => { added_mg_L: 26, steps: [] }
+ * added({ added_mg_L: 26 }) // => { added_mg_L: 26, warnings: [], steps: [] }
  * ```
  */
 export function added(request: AddedRequest): AddedAnswer {
@@ -44,6 +44,7 @@ export function added(request: AddedRequest): AddedAnswer {
     ...(additive_volume_mL === undefined ? {} : { additive_volume_mL }),
     ...(tablets === undefined ? {} : { tablets }),
     ...given,
+    warnings: [],
     steps,
   };
 }
@@ -76,6 +77,7 @@ function fromConcentration(request: AddedRequest, added_mg_L: number, additive: 
     ...(mass_g === undefined ? {} : { mass_g }),
     ...(additive_volume_mL === undefined ? {} : { additive_volume_mL }),
     ...(tablets === undefined ? {} : { tablets }),
+    warnings: [],
     steps,
   };
 }

@@ -1,4 +1,5 @@
 import type { AdditiveId } from '../additives/additive-id.ts';
+import type { Limit } from '../limits/limit.ts';
 import type { Basis, Target } from '../wine.ts';
 import type { Step } from '../working.ts';
 
@@ -37,6 +38,8 @@ export type WarningCode =
   | 'addition-large'
   | 'total-over-limit'
   | 'total-near-limit'
+  | 'free-over-limit'
+  | 'label-threshold'
   | 'total-unknown'
   | 'no-limit-on-file'
   | 'limit-unconfirmed'
@@ -93,6 +96,23 @@ export interface AsStock {
   readonly measure: Measure;
 }
 
+/** The dose that keeps under the limit, where the full one does not; 0 and no amount where nothing may go in. */
+export interface CappedDose extends Partial<MeasuredAmount> {
+  readonly dose_mg_L: number;
+  /** The limit that it keeps under, by its rule. */
+  readonly rule: string;
+  /** mg/L below the limit that are kept: for the method, and for what is planned at bottling. */
+  readonly kept_mg_L: number;
+  readonly per_vessel?: PerVessel;
+  readonly stock?: AsStock;
+  readonly measure_gives_mg_L?: number;
+  readonly free_after_mg_L?: number;
+  readonly free_expected_mg_L?: readonly [number, number];
+  readonly molecular_after_mg_L?: number;
+  readonly total_after_mg_L?: number;
+  readonly steps: readonly Step[];
+}
+
 /** The answer of a `dose`; a key is absent when it cannot be known from what was said. */
 export interface DoseAnswer extends Partial<MeasuredAmount> {
   readonly molecular_mg_L?: number;
@@ -111,6 +131,12 @@ export interface DoseAnswer extends Partial<MeasuredAmount> {
   readonly total_after_mg_L?: number;
   readonly pK?: number;
   readonly basis?: Basis;
+  /** The limit that decides: of total SO2, or of free where that one is passed and the total's is not. */
+  readonly limit?: Limit;
+  /** All limits that hold for the wine. */
+  readonly limits?: readonly Limit[];
+  /** Present where the dose passes a limit that was read. */
+  readonly capped?: CappedDose;
   readonly warnings: readonly Warning[];
   readonly choices?: readonly DoseChoice[];
   readonly steps: readonly Step[];
@@ -127,6 +153,8 @@ export interface EffectAnswer {
   readonly total_after_mg_L?: number;
   readonly pK?: number;
   readonly basis?: Basis;
+  readonly limit?: Limit;
+  readonly limits?: readonly Limit[];
   readonly warnings: readonly Warning[];
   readonly steps: readonly Step[];
 }
@@ -134,6 +162,10 @@ export interface EffectAnswer {
 /** The answer of an `added`: what follows from the entry, as far as it does. */
 export interface AddedAnswer extends Partial<Amount> {
   readonly added_mg_L?: number;
+  /** Only where the total before it is known. */
+  readonly total_after_mg_L?: number;
+  readonly limit?: Limit;
+  readonly warnings: readonly Warning[];
   readonly steps: readonly Step[];
 }
 

@@ -1,9 +1,21 @@
 import type { AdditiveAtHand } from '../additives/additive-id.ts';
 import type { VolumeShown } from '../units/shown.ts';
+import type { LimitFacts } from '../limits/limit-facts.ts';
 import type { Basis, Category, Product, Stage, Style, Target } from '../wine.ts';
 
+/** What only the law asks about the wine, and the room below its limit that is kept. */
+export interface LawFacts extends Pick<
+  LimitFacts,
+  'region' | 'organic' | 'designated_mg_L' | 'uplift' | 'quality' | 'density_kg_L' | 'pdo' | 'bulk'
+> {
+  /** What is kept below the limit for an addition that is still to come, at bottling. */
+  readonly reserve_mg_L?: number;
+  /** Where the total is from: a reading, or a reading and what went in since. */
+  readonly total_from?: 'measured' | 'running-sum';
+}
+
 /** What is known of the wine. Units stand in the names; every one may be unknown. */
-export interface WineFacts {
+export interface WineFacts extends LawFacts {
   readonly ph?: number;
   readonly free_mg_L?: number;
   readonly total_mg_L?: number;

@@ -16,6 +16,7 @@ export const WARNING_ORDER: readonly WarningCode[] = [
   'stage-not-over',
   'additive-not-permitted',
   'total-over-limit',
+  'free-over-limit',
   'gas-too-little',
   'addition-large',
   'free-needed-high',
@@ -31,6 +32,7 @@ export const WARNING_ORDER: readonly WarningCode[] = [
   'no-addition-needed',
   'addition-negligible',
   'limit-unconfirmed',
+  'label-threshold',
   'no-limit-on-file',
   'total-unknown',
 ];
