@@ -254,8 +254,18 @@ fact-product = { $product ->
     }
 fact-organic = organic
 fact-designated = designated ({ $limit })
-fact-uplift = declared year
-fact-quality = quality sparkling
+fact-uplift =
+    { $declared ->
+        [yes] declared year
+       *[no] no declared year
+    }
+fact-quality =
+    { $quality ->
+        [yes] of the quality class
+       *[no] not of the quality class
+    }
+fact-pdo = protected name (PDO)
+fact-bulk = bulk for export
 fact-density = density { $density } kg/L
 fact-reserve = { $reserve } kept for bottling
 fact-stage = { stage-now }
@@ -424,6 +434,8 @@ warning-total-over-limit =
         [known] ⚠ That would make total { $total_after_mg_L }, over { $limit_mg_L } { $unit } (international code); your country’s law decides: ask first.
        *[at-least] ⚠ That would make total at least { $total_after_mg_L }, over { $limit_mg_L } { $unit } (international code); your country’s law decides: ask first.
     }
+warning-free-over-limit = ⚠ Free could reach { $free_after_mg_L } if nothing binds, over the free limit { $limit_mg_L } { $unit } ({ $rule }): ask first.
+warning-label-threshold = ⚠ Label: total near { $threshold_mg_L } { $unit }, where the words about sulfites begin ({ $region }): confirm for your market.
 warning-total-near-limit =
     { $total ->
         [known] ⚠ Total would be { $total_after_mg_L } { $unit }, near the { $limit_mg_L } of the international code; your country’s law decides.
@@ -623,6 +635,21 @@ step-molecular-after = Molecular after, free ÷ (10^(pH − pK) + 1):
 step-salt-mass = Salt, grams in 0.1 L ÷ 0.1 L × volume:
 step-solution-strength = Strength in 100 mL, SO2 ÷ volume × 0.1 L:
 step-solution-strength-by-salt = Strength as SO2, salt × share of SO2 in it:
+step-titrant-normality = Normality of the iodine, 2 × its molarity:
+step-iodate-normality = Normality, 6 × mg of iodate ÷ 214 ÷ mL of flask:
+step-titrant-used = Titrant used, burette − blank:
+step-so2-by-titration = SO2, 32 000 × normality × titrant ÷ sample:
+step-ascorbic-counted = Ascorbic acid counts as, mg/L × 64.06 ÷ 176.12:
+step-so2-without-ascorbic = SO2 without it:
+step-spread-of-need = ± of what is needed, target × 10^(pH − pK) × ln 10 × ± of the pH:
+step-spread-of-free = ± of the free SO2:
+step-spread-of-dose = ± of the addition, root of both squared:
+step-spread-with-binding = ± with what binds:
+step-dose-lowest = Lowest, needed − free − its ±:
+step-dose-highest = Highest, needed − free + its ±:
+step-molecular-sure = Molecular one is sure of, after × (1 − root of both relative ± squared):
+step-blend-free = Free SO2 of the blend, by volume:
+step-blend-total = Total SO2 of the blend, by volume:
 safety-head = Care with { additive }
 more-head =
     { $vessel ->
@@ -651,8 +678,13 @@ round-dose = { $vessel } ({ $list }): { round-amount }
 round-dose-bare = { at }{ round-amount }
 round-amount =
     { $unit ->
-        [tablets] { $amount } tablets{ round-of }{ round-all }{ round-if-red }
-       *[other] { round-tablet }{ $amount }{ round-of }{ round-all }{ round-if-red }
+        [tablets] { $amount } tablets{ round-of }{ round-all }{ round-limited }{ round-if-red }
+       *[other] { round-tablet }{ $amount }{ round-of }{ round-all }{ round-limited }{ round-if-red }
+    }
+round-limited =
+    { $limited ->
+        [limited] {" "}(limit)
+       *[none] {""}
     }
 round-tablet =
     { $tablet ->
@@ -705,6 +737,58 @@ round-stock-of = { $vessel } { $amount }
 round-low = ⚠ Below 10 free much or all may bind: { $list }. There measure before adding again.
 round-name = { $name }
 round-again = Send each line that could not be read again, whole.
+round-total =
+    In all { $list }: { $count ->
+        [2] the two amounts
+       *[other] the { $count } amounts
+    } as weighed, added up.
+round-total-of =
+    { $kind ->
+        [tablet] { $amount } effervescent tablets of { $size } g SO2
+        [salt-tablet] { $amount } tablets of { $size } g { additive }
+       *[other] { $amount }{ round-percent } { additive }
+    }
+round-open =
+    { $count ->
+        [one] No amount for one:
+       *[other] No amount for { $count }:
+    }
+round-open-more = … and { $count } more: send “round”.
+round-more = … and { $count } more: send “round”, or take the sheet below.
+round-and-more = { $count } more
+round-warned = ⚠ Warnings stand beside { $list }: send “round”.
+button-round-all = All went in
+button-round-lines = One by one
+button-round-line =
+    { $vessel } { $amount }{ $unit ->
+        [tablet] { " " }tablet
+        [tablets] { " " }tablets
+       *[other] { "" }
+    }{ $count ->
+        [several] { " " }each
+       *[one] { "" }
+    }
+button-round-next = Next
+button-round-picture = Sheet as a picture
+button-round-file = Sheet as a file
+button-round-undo = Undo { $entries }
+round-noted =
+    Noted { $entries }: { $count ->
+        [1] one addition
+       *[other] { $count } additions
+    }, { $list }, { $when }.
+round-noted-line = Noted { $entry }: { $vessel } { $list }, { $when }.
+round-noted-each = Noted { $entries }: { $vessel } { $list } each, { $when }.
+round-noted-before = Noted before, and left: { $list }.
+round-noted-none = Noted before, all of it: entries { $entries }.
+round-not-noted = Not noted, as they have no one amount: { $list }.
+round-strike-one = One of them did not go in? Send “strike { $entry } did not go in”.
+round-pick = Which went in? { $from }–{ $to } of { $all }:
+round-pick-noted = { $vessel }: noted, entry { $entry }.
+round-pick-none = All { $all } are noted.
+round-undone = Taken back: { $entries }. They stay in the log, crossed out.
+round-undone-none = Nothing of it is left to take back.
+round-gone = No round is kept here: send it again.
 round-target-stage = { at }how many mg/L do you want to add?
 round-not-understood =
     { $about ->
@@ -1295,6 +1379,8 @@ export-stage = Stage
 export-designated_mg_L = Designated, limit mg/L
 export-uplift = Declared year
 export-quality = Quality sparkling
+export-pdo = Protected name
+export-bulk = Bulk for export
 export-density_kg_L = Density kg/L
 export-reserve_mg_L = Kept for bottling mg/L
 export-lot = Lot told
@@ -1395,3 +1481,83 @@ picture-was-blended = Blended on { $day }: the figures before are of another win
 picture-empty = Empty since { $day }.
 picture-is-odd = Free above total ({ $days }): one of the two is wrong, measure again.
 picture-nothing = No picture of { $vessel }: no SO2 measured yet in the wine that is in it.
+
+# Plain questions: the answer, a figure with its source, and what to send next.
+question-small-or-large = Fewer and larger. A small addition can bind whole and leave nothing free.
+question-small-or-large-why = Of an addition 35 to 67 % stays free; published figures disagree, so measure the day after.
+question-small-or-large-next = For your wine: T4 1450 gal pH 3.58 free 21
+question-how-often = Tanks about every month, barrels every two weeks, and a day after each addition (common practice, no source).
+question-how-often-why = Sooner when it is warm, half full or low in free SO2.
+question-how-often-next = What is due here: due
+question-which-figure = Molecular protects; it follows from free and pH. The law counts total: free and bound together.
+question-which-figure-why = 0.6 to 0.8 mg/L molecular is the usual range (Understanding Wine Chemistry, 2016).
+question-which-figure-next = Yours: pH 3.5 free 20
+question-which-yield = 57.6 %: so much SO2 is in pure potassium metabisulfite by its formula, and so I reckon.
+question-which-yield-why = 50 % is a convention of the trade with a reserve in it: the same wish takes 15 % more powder.
+question-which-yield-next = Your label says otherwise? Name it: kmbs 57%, or kmbs 96%
+question-tablets-or-powder = The same SO2, if the size is right. Powder doses finer but needs a balance.
+question-tablets-or-powder-why = Effervescent ones are sold by grams of SO2 (2 or 5 g), Campden ones by grams of salt (0.44 or 0.55 g): common practice, no source.
+question-tablets-or-powder-next = What they add: 2 tabs of 5 g in 225 L
+question-old-powder = Opened and damp it loses strength, about a tenth a year (common practice, no source). Clumped: not for wine.
+question-old-powder-why = Never smell into the bag. With old powder measure the day after: less may have gone in than you weighed.
+question-old-powder-next = Keep its date: received 1 kg kmbs lot 12
+question-wait-before-yeast = 12 to 24 hours after the addition (common practice, no source).
+question-wait-before-yeast-why = Of 50 mg/L in the must about 16 are there as total later (German trade text, 2012).
+question-wait-before-yeast-next = The dose: must 20 hl add 40
+question-after-malolactic = When malic acid is measured as gone, not before.
+question-after-malolactic-why = The bacteria need free below 5–10 and total below 30–40 mg/L (AWRI, for pH 3.3 to 3.5).
+question-after-malolactic-next = Then: T4 ML done, and its reading
+question-ppm-and-mg-L = In wine 1 ppm counts as 1 mg/L, and 1 g/hL is 10 mg/L.
+question-ppm-and-mg-L-why = Of powder it is less: 10 g/hL of potassium metabisulfite bring 57.6 mg/L SO2 (by its formula).
+question-ppm-and-mg-L-next = Try it: 10 g kmbs in 1 hl
+question-teaspoons = Never in spoons. A level teaspoon of powder weighs roughly 5 to 6 g (common practice, no source).
+question-teaspoons-why = A balance that shows 0.1 g, or a 10 % stock and a syringe, is what small lots need.
+question-teaspoons-next = The stock: make 1 L of 10% kmbs
+question-fell-short = Part of each addition binds, usually a third to a half, more in young, sweet or rotten lots. Air takes some too.
+question-fell-short-why = Or: not mixed, measured too early, old powder, another volume. 1 mg/L oxygen can use 4 mg/L SO2 (by formula).
+question-fell-short-next = Measure, then: T4 free 24. What it did: T4?
+question-strip-reads-otherwise = Trust the laboratory. Strips and titrets are a first look; dose by an aeration or iodine titration.
+question-strip-reads-otherwise-why = Acidified methods read reds too high, by up to 66 % (Virginia, 2022). Iodine counts ascorbic acid too.
+question-strip-reads-otherwise-next = Your titration: AO 20 mL sample, 1.9 mL 0.01 N
+question-stop-fermentation = No. Sulfite does not stop a working fermentation, and bottles with sugar and yeast can burst.
+question-stop-fermentation-why = Cold and a sterile filter, by someone qualified; after that sweet wine is kept near 1.5 mg/L molecular (a published table).
+question-stop-fermentation-next = Once it is still: T4 10 hl sweet pH 3.3 free 10
+question-sorbate = Sorbate never alone: it holds yeast, not bacteria, and those turn it into a smell of geranium.
+question-sorbate-why = Beside it the wine keeps its full free SO2 for 0.8 mg/L molecular (common practice, no source).
+question-sorbate-next = That SO2: T4 10 hl pH 3.4 free 12
+question-allergy = Ask a doctor: nobody here can say what is safe for a person. With asthma sulfite can be dangerous.
+question-allergy-why = Labels name it from 10 ppm total (US, 27 CFR 4.32(e)), above 10 mg/L in the EU (1169/2011). Headaches have many causes.
+question-allergy-next = What a wine holds: T4?
+question-law = It hangs on the market, the colour, the sugar. International code: red 150, white and rosé 200 mg/L total up to 4 g/L sugar, above it 300.
+question-law-why = (OIV-MA-C1-01.) Not legal advice: confirm it for your market.
+question-law-next = Your market's: limit red RS 3 EU
+question-gas = Only people trained and licensed for it where you are; mask, ventilation, a second person outside.
+question-gas-why = 0.5 ppm over a shift is the EU limit (2017/164); 100 ppm is at once dangerous to life (NIOSH).
+question-gas-next = Without gas: T4 1450 gal pH 3.58 free 21 kmbs
+question-potassium-or-sodium = Potassium for wine. Sodium is for equipment: the OIV does not name it for wine.
+question-potassium-or-sodium-why = They are not the same weight: 57.6 % SO2 in the potassium salt, 67.4 % in the sodium salt (by formula).
+question-potassium-or-sodium-next = Say which is at hand: T4 1450 gal pH 3.58 free 21 kmbs
+question-when-to-measure = A day after it is mixed in, better two (common practice, no source).
+question-when-to-measure-why = Before that a part is still on its way to being bound: it reads too high.
+question-when-to-measure-next = Then: T4 free 24
+question-how-to-mix = Dissolve it first in cold water or a little wine, about 50 g to the litre (trade journal, 2009). Pour it in while mixing.
+question-how-to-mix-why = Gloves, goggles, air. Never with acid in one vessel; wine full of CO2 foams over.
+question-how-to-mix-next = A stock: make 5 L of 5% kmbs
+question-pH-matters = The lower the pH, the more of the free SO2 is molecular, and that protects.
+question-pH-matters-why = For 0.8 mg/L molecular: 26 free at pH 3.3, 79 at pH 3.8 (University of California, 1982).
+question-pH-matters-next = Yours: pH 3.5 free 20
+question-which-target = White and rosé 0.8 mg/L molecular, red 0.6, sweet 1.5, where you set no other.
+question-which-target-why = Published: 0.6 to 0.8 for stability (Understanding Wine Chemistry, 2016), red at bottling 0.4 to 0.6 (after California, 1982).
+question-which-target-next = To change it: target 0.5 for reds
+question-stock-keeps = Days, not weeks: make it fresh, close it, date it (common practice, no source).
+question-stock-keeps-why = The OIV calls SO2 and bisulfite solutions unstable.
+question-stock-keeps-next = Fresh: make 1 L of 10% kmbs
+question-too-much = Put nothing more in. Time, air and racking lower free SO2; blending lowers both free and total.
+question-too-much-why = From about 2 mg/L molecular people smell it (Understanding Wine Chemistry, 2016). Peroxide: only someone qualified, where law allows it.
+question-too-much-next = Where it stands: T4?
+question-no-sulfite = You can, and the wine then stands on cold, clean, full vessels, low pH and quick sale.
+question-no-sulfite-why = Yeast make some of their own, usually under 30 mg/L: "no sulfite added" is not "no sulfite".
+question-no-sulfite-next = What it has: T4 pH 3.5 free 5
+question-bottling = Measure some days before; the last addition goes in before the line starts, mixed and measured.
+question-bottling-why = Each mg/L of oxygen picked up can take up to 4 mg/L of free SO2 (by formula).
+question-bottling-next = With its oxygen: bottling T4 40 hl pH 3.4 free 22 oxygen 2 mg/L

@@ -6,7 +6,9 @@ import { emptyReading } from './empty-reading.ts';
 import { foldText } from './fold-text.ts';
 import { helpTopicOf } from './help-topic.ts';
 import { joinNumbers } from './join-numbers.ts';
-import { LEXICON } from './lexicon.ts';
+import { lexiconOf } from './lexicon.ts';
+import type { Lexicon } from './lexicon.ts';
+import { partElided } from './spellings.ts';
 import { linesOf } from './lines.ts';
 import { groupingOf } from './message-language.ts';
 import { ownPieces } from './own-pieces.ts';
@@ -29,14 +31,14 @@ export const LONGEST_MESSAGE = 4096;
 const MOST_LINES = 300;
 
 /** Tags of all words and phrases of some terms, shorter phrases inside longer ones included. */
-function cuesOf(terms: readonly Term[]): ReadonlySet<Tag> {
-  const words = terms.flatMap(({ kind, text }) => (kind === 'word' ? text.split(/[ -]/) : ['\n']));
+function cuesOf(terms: readonly Term[], lexicon: Lexicon): ReadonlySet<Tag> {
+  const words = terms.flatMap(({ kind, text }) => (kind === 'word' ? (lexicon.elides ? partElided(text) : text).split(/[ -]/) : ['\n']));
   const cues = new Set<Tag>();
   for (let i = 0; i < words.length; i++) {
     let phrase = words[i] ?? '';
-    const most = LEXICON.longest.get(phrase) ?? 0;
+    const most = lexicon.longest.get(phrase) ?? 0;
     for (let n = 1; n <= most; n++, phrase = `${phrase} ${words[i + n - 1] ?? '\n'}`) {
-      for (const tag of LEXICON.phrases.get(phrase)?.tags ?? []) cues.add(tag);
+      for (const tag of lexicon.phrases.get(phrase)?.tags ?? []) cues.add(tag);
     }
   }
   for (const { tags } of terms) for (const tag of tags) cues.add(tag);
@@ -51,13 +53,15 @@ export function setBoard(
   settings: ReaderSettings,
 ): Board {
   const { terms, remark } = takeRemark(message, folded, said);
+  const lexicon = lexiconOf(folded, settings.language);
   return {
     message,
     folded,
     terms,
     taken: [],
-    cues: cuesOf(terms),
-    grouping: groupingOf(terms, settings.language),
+    cues: cuesOf(terms, lexicon),
+    lexicon,
+    grouping: groupingOf(terms, lexicon, settings.language),
     settings,
     findings: [],
     problems: [],
@@ -65,7 +69,7 @@ export function setBoard(
     setAside: [],
     marks: {},
     pastTense: false,
-    pieces: ownPieces(terms),
+    pieces: ownPieces(terms, lexicon),
     ...(remark !== undefined && { remark }),
   };
 }
@@ -120,7 +124,7 @@ export function readMessage(message: string, settings: ReaderSettings, waiting?:
   if (danger) return understood([emptyReading('emergency', { topic: danger.danger })], {}, danger.language);
   const answer = waiting && readWaiting(folded.text.trim(), waiting, settings);
   if (answer) return understood([answer]);
-  const terms = joinNumbers(splitTerms(folded, LEXICON));
+  const terms = joinNumbers(splitTerms(folded, lexiconOf(folded, settings.language)));
   const lines = linesOf(terms);
   const round =
     lines.length > 1 && lines.length <= MOST_LINES

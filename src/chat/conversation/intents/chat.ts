@@ -1,4 +1,6 @@
+import { isQuestion } from '../../reader/question-topic.ts';
 import type { Reading } from '../../reader/understood.ts';
+import type { QuestionId } from '../../reader/words/words.ts';
 import { HELP_KEYS } from '../../replies/help-keys.ts';
 import type { Line } from '../../replies/reply.ts';
 import type { SentenceKey } from '../../replies/sentence-keys.ts';
@@ -41,7 +43,15 @@ function keysFor(reading: Reading): readonly SentenceKey[] {
   return reading.topic === 'thanks' ? ['chat-thanks'] : ['chat-other'];
 }
 
+/** The answer to a plain question, a figure with its source, and the message that goes on from there. */
+const questionLines = (topic: QuestionId): Line[] => [
+  line('first', `question-${topic}`),
+  line('first', `question-${topic}-why`),
+  line('first', `question-${topic}-next`),
+];
+
 function linesFor(reading: Reading): Line[] {
+  if (isQuestion(reading.topic)) return questionLines(reading.topic);
   const isHelp = reading.intent === 'chat' && reading.topic?.startsWith('help') === true;
   if (!isHelp) return keysFor(reading).map((key) => line('first', key));
   const ofTopic = topicLines(reading.topic);

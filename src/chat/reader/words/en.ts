@@ -53,10 +53,10 @@ export const en: Words = {
     'label:free': [
       'free', 'fre', 'freee', 'frre', 'fee so2', 'fso2', 'f so2', 'fs02', 'free so2', 'free so', 'so2 free',
       'free sulfur', 'free sulphur', 'free sulfur dioxide', 'free sulphur dioxide', 'free sulfite',
-      'free sulphite', 'fso', 'freeso2', 'free s02', 'f s02', 'fr', 'fr so2', 'libre', 'livre', 'libera', 'libero', 'frei', 'freie', 'freies', 'so2 libre', 'so2 livre', 'so2 libera', 'freies so2', 'freie so2', 'so2l'],
+      'free sulphite', 'fso', 'freeso2', 'free s02', 'f s02', 'fr', 'fr so2', 'so2l'],
     'label:total': [
       'total', 'totl', 'totla', 'toal', 'tot', 'tso2', 't so2', 'ts02', 'total so2', 'so2 total', 'tot so2',
-      'total sulfur', 'total sulphur', 'total sulfur dioxide', 'total sulphur dioxide', 'totals', 'total s02', 'totale', 'gesamt', 'gesamt so2', 'so2 totale', 'gesamtes so2', 'so2t'],
+      'total sulfur', 'total sulphur', 'total sulfur dioxide', 'total sulphur dioxide', 'totals', 'total s02', 'so2t'],
     'label:so2': ['so2', 's02', 'sulfur dioxide', 'sulphur dioxide', 'so 2'],
     'label:temperature': ['temp', 'temps', 'tmp', 'temperature', 'wine temp'],
     'label:alcohol': ['alc', 'abv', 'alcohol', 'etoh', 'ethanol', 'alc vol', 'vol alc'],
@@ -374,9 +374,13 @@ export const en: Words = {
     ],
     'cue:designated': ['designated', 'designation', 'designated sweet', 'designated sweet wine', 'designated wine', 'designated limit', 'designation limit'],
     'cue:declared-year': ['declared year', 'declared bad year', 'declared a bad year', 'bad year declared', 'year declared', 'year is declared', 'in a declared year', 'declared uplift', 'uplift declared'],
+    'cue:undeclared-year': ['no declared year', 'not a declared year', 'year not declared', 'no uplift', 'year is not declared'],
     'cue:density': ['density', 'wine density'],
     'cue:density-unit': ['kg l', 'g ml', 'g cm3', 'kg dm3'],
     'cue:quality': ['quality sparkling', 'quality sparkling wine'],
+    'cue:other-sparkling': ['other sparkling', 'other sparkling wine', 'plain sparkling', 'ordinary sparkling'],
+    'cue:pdo': ['pdo', 'pdo wine', 'national pdo'],
+    'cue:bulk': ['bulk wine', 'bulk export', 'in bulk', 'bulk for export', 'for bulk export'],
     'cue:keep': ['keep', 'keep back', 'hold back', 'set aside', 'reserve', 'save', 'leave', 'leave room for', 'keep room for'],
     'cue:bottling': ['bottling'],
     'cue:bottling-reserve': ['bottling reserve', 'reserve for bottling', 'kept for bottling'],
@@ -424,7 +428,7 @@ export const en: Words = {
       'icewine',
     ],
     'category:sparkling': [
-      'quality sparkling', 'quality sparkling wine',
+      'quality sparkling', 'quality sparkling wine', 'other sparkling', 'other sparkling wine', 'plain sparkling', 'ordinary sparkling',
       'sparkling', 'sparkler', 'fizz', 'sparkling wine', 'bubbly', 'petnat', 'pet nat', 'bubbles', 'sparklng',
       'semi sparkling', 'spumante', 'cremant',
     ],
@@ -761,7 +765,7 @@ export const en: Words = {
   ],
   neverMended: [
     'sheet', 'sheets', 'taken', 'thank',
-    'metabisulfide', 'metabisulphide', 'bisulfide', 'libre', 'livre', 'libra', 'livres', 'libres', 'while',
+    'metabisulfide', 'metabisulphide', 'bisulfide', 'libra', 'while', 'most',
     'write', 'bottle', 'gallop', 'sugary', 'adder', 'tanks', 'thanks', 'carrel', 'quarrel', 'liter', 'latter',
     'later', 'letter', 'lighter', 'volumes', 'tempo', 'tempt', 'temple', 'targe', 'barrelled', 'sugared',
     'bonding', 'blinding', 'winding', 'finding', 'minding', 'sulfide', 'sulphide', 'sulfate', 'sulphate',
@@ -885,10 +889,11 @@ export const en: Words = {
     allergy: [
       'allerg* & sulfite*|sulphite*|so2|sulfur|sulphur|wine',
       'headache|headaches & sulfite*|sulphite*|so2|sulfur|sulphur|wine|wines',
+      'asthma* & drink|drinks|bad|safe|wine',
       'asthma*|people|pregnant|health|healthy|poisonous|toxic|hangover* & sulfite*|sulphite*|so2 & is|are|do|does|can|bad|dangerous|safe',
     ],
     gas: [
-      'so2 gas|sulfur dioxide gas|sulphur dioxide gas|gas cylinder|liquid so2|gas bottle|cylinder of so2 & can|who|is|do|does|how|may|need|what|training|allowed|dangerous|safely|handle',
+      'so2 gas|so2 cylinder|sulfur cylinder|sulfur dioxide gas|sulphur dioxide gas|gas cylinder|liquid so2|gas bottle|cylinder of so2 & can|who|is|do|does|how|may|need|what|training|allowed|dangerous|safely|handle',
     ],
     'potassium-or-sodium': [
       'sodium|smbs|na meta|na-meta & potassium|kmbs|k meta|k-meta|pot meta',
@@ -896,6 +901,7 @@ export const en: Words = {
     ],
     law: [
       'legal|legally|law|laws|allowed|permitted|maximum|max|regulation|regulations & so2|sulfite*|sulphite*|sulfur|sulphur|wine & what|whats|how|is|legal|which|does|limit|maximum|max & !training|gas',
+      'how much so2|how much sulfur|how much sulphur|how much sulfite & may|allowed & red|white|wine|rose|have',
       'contains sulfites|contains sulphites|contain sulfites & label|labels|labelling|labeling|write|put|bottle',
     ],
     'stock-keeps': [
@@ -943,7 +949,7 @@ export const en: Words = {
       'fell short|came up short|came in low|below target|less than planned|lower than planned|missed the target & why|what|how|happened',
     ],
     'how-often': [
-      'how often|every how|how many times|once a month|every week|every month|each week & measure|measured|test|check|so2|free & !racking|add a',
+      'how often|how frequently|how regularly|every how|how many times|once a month|every week|every month|each week & measure|measured|test|tested|check|checked|so2|free & !racking|add a',
     ],
     'small-or-large': [
       'small|little|bit|split|several|many & big|large|one|once|doses|dose|additions|why|not & or|better|should|why|can|instead & so2|sulfite|sulphite|sulfur|dose|doses|addition|additions|all in|racking & !powder|tablets',
@@ -958,6 +964,7 @@ export const en: Words = {
       'how do i add|how to add|how do you add|best way to add|best way to put|how do i put|how should i add & sulfite|sulphite|so2|meta|kmbs|powder|sulfur|sulphur',
     ],
     'ppm-and-mg-L': [
+      'ppm & mg / l|mg/l & equal|same|equals|is|or',
       'ppm|parts per million & mg l|mg/l|mgl|milligrams|g/hl|difference|same',
       'what\'s a ppm|whats a ppm|what is a ppm|what is ppm|what does ppm|what\'s ppm|whats ppm',
       'how many mg|how many ppm|how much is one|how do i turn|how do you turn|convert & g/hl|g / hl|g hl|gram per hectolitre|grams per hectolitre',
@@ -966,13 +973,14 @@ export const en: Words = {
       'ph & why|what has|have to|really need|need to|matter|matters & so2|sulfite|sulphite|sulfur|sulphur|need|measure|matter|matters',
     ],
     bottling: [
-      'bottling|bottle & so2|free|sulfite|sulphite|sulfur|sulphur|addition & how much|should|when|do|lost|higher|loss & !sweet|label|without|gas',
+      'bottling|bottle & so2|free|sulfite|sulphite|sulfur|sulphur|addition & how much|what free|what so2|should|when|do|lost|higher|loss & !sweet|label|without|gas',
     ],
     'which-target': [
       '0.8|0.5|0.6|0.4|0.7|1.5 & molecular|red|reds|white|whites|rose|enough|mol & why|should|is|enough|what|or',
       'which|what & molecular|target|free so2|level of free|level of so2|free sulfur & aim|should|use|for|good|have|right|need',
     ],
     'too-much': [
+      'overdosed|over dosed|oversulfited|over sulfited & what|how|help',
       'too much|excess|over sulfited|oversulfited|over dosed|overdosed & so2|sulfite|sulphite|sulfur|sulphur|meta|it',
       'lower|reduce|remove|get rid|take out|bring down|bring the free down|get the free down|smells of & so2|sulfite|sulphite|sulfur|sulphur|free|matches & how|can|does|what|wine',
     ],

@@ -29,7 +29,7 @@ export type CueId =
   | 'greeting' | 'thanks' | 'help' | 'cellar' | 'plain' | 'potassium' | 'sodium' | 'yet'
   | 'percent' | 'please' | 'in-store' | 'into' | 'clock-before' | 'no' | 'states' | 'plus' | 'times' | 'wick'
   | 'should' | 'fullness' | 'share-word' | 'limit' | 'sample-word' | 'past-time' | 'put' | 'lately' | 'bag' | 'buy' | 'in-water-name' | 'solution-name' | 'per-barrel' | 'rises-too' | 'tap-too'
-  | 'designated' | 'declared-year' | 'density' | 'density-unit' | 'quality' | 'keep' | 'bottling' | 'bottling-reserve'; // prettier-ignore
+  | 'designated' | 'declared-year' | 'density' | 'density-unit' | 'undeclared-year' | 'quality' | 'other-sparkling' | 'pdo' | 'bulk' | 'keep' | 'bottling' | 'bottling-reserve'; // prettier-ignore
 
 /** What a word is. */
 export type Tag =
