@@ -1,7 +1,7 @@
 import { placeOf } from '../reader/board.ts';
 import { foldText } from '../reader/fold-text.ts';
 import { joinNumbers } from '../reader/join-numbers.ts';
-import { LEXICON } from '../reader/lexicon.ts';
+import { lexiconOf } from '../reader/lexicon.ts';
 import { readDraft } from '../reader/read-draft.ts';
 import { setBoard } from '../reader/read-message.ts';
 import { splitTerms } from '../reader/split-terms.ts';
@@ -20,7 +20,12 @@ const LONGEST = 300;
 export function readWords(text: string, settings: ReaderSettings): WordsRead | undefined {
   if (text.length > LONGEST) return undefined;
   const folded = foldText(text);
-  const board = setBoard(text, folded, joinNumbers(splitTerms(folded, LEXICON)), settings);
+  const board = setBoard(
+    text,
+    folded,
+    joinNumbers(splitTerms(folded, lexiconOf(folded, settings.language))),
+    settings,
+  );
   const draft = readDraft(board);
   const strangers = board.terms.flatMap((_, i) => (isStranger(board, i) ? [placeOf(board, i, i).text] : []));
   return { ...draft, strangers };

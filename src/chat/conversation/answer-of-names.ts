@@ -1,7 +1,7 @@
 import type { AdditiveId } from '../../core/additives/additive-id.ts';
 import { foldText } from '../reader/fold-text.ts';
 import { joinNumbers } from '../reader/join-numbers.ts';
-import { LEXICON } from '../reader/lexicon.ts';
+import { lexiconOf } from '../reader/lexicon.ts';
 import { readDraft } from '../reader/read-draft.ts';
 import { setBoard } from '../reader/read-message.ts';
 import { splitTerms } from '../reader/split-terms.ts';
@@ -29,7 +29,7 @@ const STOCK_OF: Readonly<Partial<Record<AdditiveId, AdditiveId>>> = {
 
 function draftOf(text: string, most: number, settings: ReaderSettings): Draft | undefined {
   const folded = foldText(text);
-  const terms = joinNumbers(splitTerms(folded, LEXICON));
+  const terms = joinNumbers(splitTerms(folded, lexiconOf(folded, settings.language)));
   return terms.length > most ? undefined : readDraft(setBoard(text, folded, terms, settings));
 }
 

@@ -3,6 +3,7 @@ import type { FoldedText } from './fold-text.ts';
 import type { Grouping } from './numbers.ts';
 import { readDecimal, readNumeral } from './numbers.ts';
 import { concentrationLength } from './join-numbers.ts';
+import type { Lexicon } from './lexicon.ts';
 import type { Piece } from './own-pieces.ts';
 import type { SaidWhen } from './command.ts';
 import type { Term } from './split-terms.ts';
@@ -41,6 +42,8 @@ export interface Board {
   pastTense: boolean;
   /** The terms as the bot's own words. */
   readonly pieces: readonly Piece[];
+  /** The words with which the message is read. */
+  readonly lexicon: Lexicon;
   /** The board is tried as a statement of something that happened to a vessel. */
   readonly tells?: boolean;
   /** The board is tried as an order for a vessel. */
@@ -56,7 +59,7 @@ export interface Board {
 
 /** The same terms with nothing claimed or found yet, for a reading that is only tried. */
 export const freshBoard = (
-  { message, folded, terms, cues, grouping, settings, pieces, remark }: Board,
+  { message, folded, terms, cues, grouping, settings, pieces, lexicon, remark }: Board,
   tried: { readonly tells?: boolean; readonly orders?: boolean } = {},
 ): Board => ({
   message,
@@ -67,6 +70,7 @@ export const freshBoard = (
   grouping,
   settings,
   pieces,
+  lexicon,
   findings: [],
   problems: [],
   notes: [],

@@ -1,5 +1,4 @@
 import type { Board } from './board.ts';
-import { LEXICON } from './lexicon.ts';
 import type { Piece } from './own-pieces.ts';
 import { READ_IN_FULL } from './words/read-in-full.ts';
 import type { HelpTopic } from './words/words.ts';
@@ -12,14 +11,18 @@ const TOPICS: ReadonlyMap<string, HelpTopic> = new Map(
   ),
 );
 
-const isHelp = ({ text }: Piece): boolean => LEXICON.phrases.get(text)?.tags.includes('cue:help') === true;
+const isHelpIn =
+  ({ phrases }: Board['lexicon']) =>
+  ({ text }: Piece): boolean =>
+    phrases.get(text)?.tags.includes('cue:help') === true;
 
 /** What may stand between `help` and its topic, or around both. */
 const SMALL: ReadonlySet<string> = new Set(['filler', 'for', 'of', 'on', 'with', 'and', 'article', 'show']);
 const isSmall = ({ ids }: Piece): boolean => ids.some((id) => SMALL.has(id));
 
 /** The topic of `help law`, `/help law`, `help with the law?`: of nothing that says more than that. */
-export function helpTopicOf({ pieces }: Board): HelpTopic | undefined {
+export function helpTopicOf({ pieces, lexicon }: Board): HelpTopic | undefined {
+  const isHelp = isHelpIn(lexicon);
   const said = pieces.filter(({ kind }) => kind !== 'mark' && kind !== 'break');
   if (said.length > 8 || !said.some(isHelp)) return undefined;
   const rest = said.filter((piece) => !isHelp(piece));

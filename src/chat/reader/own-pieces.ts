@@ -1,7 +1,8 @@
+import type { Lexicon, OwnPhrase } from './lexicon.ts';
+import { partElided } from './spellings.ts';
 import type { Term } from './split-terms.ts';
 import { termIn } from './split-terms.ts';
-import { READ_IN_FULL } from './words/read-in-full.ts';
-import type { OwnWordId, Words } from './words/words.ts';
+import type { OwnWordId } from './words/words.ts';
 
 /** A word, numeral, mark or line's end of a message, and what it is among the bot's own words. */
 export interface Piece {
@@ -13,46 +14,24 @@ export interface Piece {
   /** The terms it stands in. */
   readonly from: number;
   readonly to: number;
-}
-
-interface Phrase {
-  readonly words: readonly string[];
-  readonly ids: OwnWordId[];
+  /** The month or the day of the week that it names; January and Monday are 1. */
+  readonly month?: number;
+  readonly weekday?: number;
 }
 
 const NONE: readonly OwnWordId[] = [];
-const NO_PHRASES: readonly Phrase[] = [];
-
-function indexOf(lists: readonly Words[]): Map<string, Phrase[]> {
-  const index = new Map<string, Phrase[]>();
-  for (const [id, entries] of lists.flatMap(
-    ({ own = {} }) => Object.entries(own) as [OwnWordId, readonly string[]][],
-  )) {
-    for (const entry of entries) {
-      const words = entry.split(' ');
-      const same = index.get(words[0] ?? '') ?? [];
-      const known = same.find((phrase) => phrase.words.join(' ') === entry);
-      if (known) known.ids.push(id);
-      else same.push({ words, ids: [id] });
-      index.set(words[0] ?? '', same);
-    }
-  }
-  for (const phrases of index.values()) phrases.sort((a, b) => b.words.length - a.words.length);
-  return index;
-}
-
-const OWN = indexOf(READ_IN_FULL);
+const NO_PHRASES: readonly OwnPhrase[] = [];
 
 /** Each word by itself, whatever phrase the lexicon made of it. */
-function singlesOf(terms: readonly Term[]): Piece[] {
+function singlesOf(terms: readonly Term[], lexicon: Lexicon): Piece[] {
   const singles: Piece[] = [];
   for (let i = 0; i < terms.length; i++) {
     const { kind, text, gap } = termIn(terms, i);
-    if (kind !== 'word' || !/[ .-]/.test(text)) {
+    if (kind !== 'word' || !/[ .'-]/.test(text)) {
       singles.push({ kind, text, ids: NONE, gap, from: i, to: i });
       continue;
     }
-    for (const [n, word] of text.split(/[ .-]+/).entries())
+    for (const [n, word] of (lexicon.elides ? partElided(text) : text).split(/[ .-]+/).entries())
       singles.push({ kind, text: word, ids: NONE, gap: n > 0 || gap, from: i, to: i });
   }
   return singles;
@@ -77,22 +56,23 @@ function phraseEnd(singles: readonly Piece[], i: number, words: readonly string[
  * The pieces of a message, the longest phrase of the bot's own words first.
  *
  * @param terms The terms of a line or message.
+ * @param lexicon The words they were looked up in.
  * @example
  * ```ts
  * import { foldText } from './fold-text.ts';
  * import { LEXICON } from './lexicon.ts';
  * import { splitTerms } from './split-terms.ts';
- * ownPieces(splitTerms(foldText('forget me'), LEXICON)).map((piece) => piece.text) // => ['forget me']
+ * ownPieces(splitTerms(foldText('forget me'), LEXICON), LEXICON).map((piece) => piece.text) // => ['forget me']
  * ```
  */
-export function ownPieces(terms: readonly Term[]): Piece[] {
-  const singles = singlesOf(terms);
+export function ownPieces(terms: readonly Term[], lexicon: Lexicon): Piece[] {
+  const singles = singlesOf(terms, lexicon);
   const pieces: Piece[] = [];
   for (let i = 0; i < singles.length; i++) {
     const single = singles[i] as Piece;
     let piece = single;
     let last = i;
-    const phrases = single.kind === 'word' ? OWN.get(single.text) : undefined;
+    const phrases = single.kind === 'word' ? lexicon.own.get(single.text) : undefined;
     for (const { words, ids } of phrases ?? NO_PHRASES) {
       const end = phraseEnd(singles, i, words);
       if (end === undefined) continue;
@@ -100,7 +80,14 @@ export function ownPieces(terms: readonly Term[]): Piece[] {
       last = end;
       break;
     }
-    pieces.push(piece);
+    const month = single.kind === 'word' ? lexicon.months.get(piece.text) : undefined;
+    const weekday = single.kind === 'word' ? lexicon.weekdays.get(piece.text) : undefined;
+    const isDated = month !== undefined || weekday !== undefined;
+    pieces.push(
+      isDated
+        ? { ...piece, ...(month !== undefined && { month }), ...(weekday !== undefined && { weekday }) }
+        : piece,
+    );
     i = last;
   }
   return pieces;

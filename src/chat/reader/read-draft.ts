@@ -48,7 +48,7 @@ const tooManyFigures = (board: Board): Draft => ({
 
 /** Words of another language beside a reading: what they said is not in it, and that has to be told. */
 function noteUnread(board: Board, intent: Draft['intent']): void {
-  if (intent === 'chat' || !isForeignTalk(board.terms, board.settings.language)) return;
+  if (intent === 'chat' || !isForeignTalk(board.terms, board.lexicon)) return;
   const unread = board.terms.flatMap((_, i) => (isStranger(board, i) ? [placeOf(board, i, i).text] : []));
   if (unread.length > 0) board.notes.push({ id: 'unread-words', text: unread.slice(0, 6).join(', ') });
 }

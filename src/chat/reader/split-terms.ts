@@ -2,6 +2,7 @@ import type { FoldedText } from './fold-text.ts';
 import type { Entry, Lexicon } from './lexicon.ts';
 import type { Tag } from './words/words.ts';
 import { mendWord } from './mend-word.ts';
+import { partElided } from './spellings.ts';
 
 /** One piece of a message: a numeral, a word or phrase, a mark, or a line's end. */
 export interface Term {
@@ -51,7 +52,14 @@ function wordEnd(text: string, from: number, lexicon: Lexicon): number {
   }
   let i = from;
   while (isLetter(text[i]) || (text[i] === "'" && isLetter(text[i + 1]))) i++;
-  return Math.max(i, from + 1);
+  return Math.max(elidedEnd(text, from, i, lexicon) ?? i, from + 1);
+}
+
+/** `l'acide`: the end of an article that is drawn together with its word, unless both are one known word. */
+function elidedEnd(text: string, from: number, to: number, lexicon: Lexicon): number | undefined {
+  const cut = lexicon.elides ? text.indexOf("'", from) : -1;
+  if (cut < 0 || cut >= to - 1 || lexicon.phrases.has(text.slice(from, to))) return undefined;
+  return partElided(text.slice(from, to)).includes(' ') ? cut + 1 : undefined;
 }
 
 /** Known words run together beside a figure (`galph` in `1150galph3.55`): each piece a unit or a label. */

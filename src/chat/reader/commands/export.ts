@@ -1,6 +1,5 @@
 import type { SaidDay } from '../../../core/time/said-when.ts';
 import type { Command, Span } from '../command.ts';
-import { MONTHS } from '../moments/calendar.ts';
 import { dayAt } from '../moments/day-at.ts';
 import type { Piece } from '../own-pieces.ts';
 import { isOwn } from '../own-pieces.ts';
@@ -46,8 +45,7 @@ function spanOf(talk: Talk, { days }: Days, year: Piece | undefined): Span | und
 }
 
 /** `november`, `nov 2026`. */
-function monthOf(talk: Talk, { text }: Piece, year: Piece | undefined): Span | undefined {
-  const month = MONTHS.get(text);
+function monthOf(talk: Talk, { month }: Piece, year: Piece | undefined): Span | undefined {
   if (month === undefined || says(talk, 'month', 'year', 'last', 'from')) return undefined;
   return { is: 'named-month', month, ...(year && { year: Number(year.text) }) };
 }
@@ -60,7 +58,7 @@ export function readExport(talk: Talk): Command | undefined {
   if (board.findings.length > 0 && !talk.isOfVessel) return undefined;
   const days = daysIn(said);
   const year = yearIn(said, days.pieces);
-  const month = days.days.length === 0 ? said.find(({ text }) => MONTHS.has(text)) : undefined;
+  const month = days.days.length === 0 ? said.find(({ month: named }) => named !== undefined) : undefined;
   const read = new Set([...days.pieces, ...(year ? [year] : []), ...(month ? [month] : [])]);
   const dashes = said.filter(({ kind, text }) => kind === 'mark' && text === '-');
   if (days.days.length === 2) for (const dash of dashes) read.add(dash);

@@ -2,7 +2,6 @@ import type { Board } from '../board.ts';
 import { isMark } from '../board.ts';
 import type { Command } from '../command.ts';
 import { draftOfBoard } from '../draft-of-board.ts';
-import { MONTHS, WEEKDAYS } from '../moments/calendar.ts';
 import { emptyReading } from '../empty-reading.ts';
 import type { Draft } from '../understood.ts';
 import type { OwnWordId } from '../words/words.ts';
@@ -48,7 +47,8 @@ const OPENERS: ReadonlySet<OwnWordId> = new Set([
 /** Whether a message could be talk to the bot at all: one of its own words opens it, it is a day, or asks for a vessel. */
 const mayBeTalk = (board: Board): boolean =>
   board.pieces.some(
-    ({ ids, text }) => ids.some((id) => OPENERS.has(id)) || MONTHS.has(text) || WEEKDAYS.has(text),
+    ({ ids, month, weekday }) =>
+      ids.some((id) => OPENERS.has(id)) || month !== undefined || weekday !== undefined,
   ) ||
   isMark(board, 0, '/') ||
   (isMark(board, board.terms.length - 1, '?') && board.terms.length <= 6) ||

@@ -6,7 +6,6 @@ import { agoAt } from '../moments/ago-at.ts';
 import type { ClockAt } from '../moments/clock-at.ts';
 import { clockAt, isTime } from '../moments/clock-at.ts';
 import { dayAt } from '../moments/day-at.ts';
-import { MONTHS, WEEKDAYS } from '../moments/calendar.ts';
 import type { Part } from '../moments/part.ts';
 import { stands } from '../moments/stands.ts';
 import type { Piece } from '../own-pieces.ts';
@@ -52,9 +51,11 @@ function mayOpen(pieces: readonly Piece[], k: number): boolean {
   const [piece, next] = [pieces[k], pieces[k + 1]];
   if (piece === undefined || piece.kind === 'mark' || piece.kind === 'break') return false;
   if (piece.kind === 'word')
-    return piece.ids.some((id) => MOMENTS.has(id)) || MONTHS.has(piece.text) || WEEKDAYS.has(piece.text);
+    return (
+      piece.ids.some((id) => MOMENTS.has(id)) || piece.month !== undefined || piece.weekday !== undefined
+    );
   if (next === undefined || next.kind !== 'word') return piece.text.includes('.') || next?.gap === false;
-  return next.ids.length > 0 || MONTHS.has(next.text) || piece.text.includes('.');
+  return next.ids.length > 0 || next.month !== undefined || piece.text.includes('.');
 }
 
 /** `T4 Nov 12`, `tank 4 Nov 12`: the 4 is the vessel's. */

@@ -1,7 +1,6 @@
 import type { SaidDay } from '../../../core/time/said-when.ts';
 import type { Piece } from '../own-pieces.ts';
 import { isOwn } from '../own-pieces.ts';
-import { MONTHS, WEEKDAYS } from './calendar.ts';
 
 /** A day as it stands in the text, and its last piece. */
 export interface DayAt {
@@ -35,14 +34,14 @@ const pastOrdinal = (pieces: readonly Piece[], i: number): number =>
 
 /** `12 Nov`, `12th of November 2026`, `Nov 12`. */
 function namedDate(pieces: readonly Piece[], i: number): DayAt | undefined {
-  const before = MONTHS.get(pieces[i]?.text ?? '');
+  const before = pieces[i]?.month;
   const day = wholeAt(pieces, before === undefined ? i : i + 1, /^\d{1,2}$/);
   if (day === undefined) return undefined;
   let to = pastOrdinal(pieces, before === undefined ? i + 1 : i + 2);
   let month = before;
   if (month === undefined) {
     if (isOwn(pieces, to, 'of')) to++;
-    month = MONTHS.get(pieces[to]?.text ?? '');
+    month = pieces[to]?.month;
     to++;
   }
   if (month === undefined) return undefined;
@@ -88,7 +87,7 @@ export function dayAt(pieces: readonly Piece[], i: number): DayAt | undefined {
   if (isOwn(pieces, i, 'before-yesterday')) return { day: { is: 'before-yesterday' }, to: past(i) };
   if (isOwn(pieces, i, 'yesterday', 'last-night')) return { day: { is: 'yesterday' }, to: past(i) };
   const at = isOwn(pieces, i, 'last') ? i + 1 : i;
-  const weekday = WEEKDAYS.get(pieces[at]?.text ?? '');
+  const weekday = pieces[at]?.weekday;
   if (weekday !== undefined) return { day: { is: 'weekday', weekday }, to: past(at) };
   return namedDate(pieces, i);
 }

@@ -6,5 +6,5 @@ import { it } from './it.ts';
 import { pt } from './pt.ts';
 import type { Words } from './words.ts';
 
-/** The words of every language; so far only English is read in full (`lexicon`), the others for an emergency. */
+/** The words of every language, English first. */
 export const ALL_WORDS: readonly Words[] = [en, es, fr, it, de, pt];

@@ -1,5 +1,5 @@
-import { en } from './en.ts';
+import { ALL_WORDS } from './all.ts';
 import type { Words } from './words.ts';
 
-/** The languages that are read in full; of the others only what makes an emergency. */
-export const READ_IN_FULL: readonly Words[] = [en];
+/** The languages that are read in full. */
+export const READ_IN_FULL: readonly Words[] = ALL_WORDS;

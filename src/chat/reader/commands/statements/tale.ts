@@ -1,12 +1,13 @@
 import type { Board, Finding } from '../../board.ts';
 import { freshBoard } from '../../board.ts';
 import { findKind } from '../../finders/kind.ts';
+import { findLawFacts } from '../../finders/law-facts.ts';
 import { findStage } from '../../finders/stage.ts';
 import { findVessel } from '../../finders/vessel.ts';
 import { findVolume } from '../../finders/volume.ts';
 import { findWhen } from '../../finders/when.ts';
-import { LEXICON } from '../../lexicon.ts';
 import type { Piece } from '../../own-pieces.ts';
+import { partElided } from '../../spellings.ts';
 import type { Term } from '../../split-terms.ts';
 import type { OwnWordId } from '../../words/words.ts';
 
@@ -23,7 +24,7 @@ export interface Tale {
 }
 
 const GOES: ReadonlySet<OwnWordId> = new Set(['moved', 'racked', 'pumped', 'blended']);
-const FINDERS = [findStage, findWhen, findVessel, findVolume, findKind];
+const FINDERS = [findStage, findWhen, findVessel, findLawFacts, findVolume, findKind];
 
 const isStop = ({ kind, text, gap }: Piece): boolean =>
   kind === 'break' || (kind === 'mark' && (/^[,.;:!=]$/.test(text) || (text === '-' && gap)));
@@ -38,12 +39,16 @@ function apart({ terms, pieces }: Board): readonly Term[] {
   return terms.map((term) => (term.tags.includes('cue:to') ? { ...term, tags: [] } : term));
 }
 
+/** A phrase as the lexicon has it. */
+const spacedOf = (text: string, { lexicon }: Board): string =>
+  (lexicon.elides ? partElided(text) : text).replaceAll('-', ' ');
+
 /** A word that was mended may be another: nothing is told of a vessel by a slip. */
 const isMended = (board: Board, { field, from, to }: Finding): boolean =>
   field !== 'volume_L' &&
   board.terms
     .slice(from, to + 1)
-    .some(({ text, tags }) => tags.length > 0 && !LEXICON.phrases.has(text.replaceAll('-', ' ')));
+    .some(({ text, tags }) => tags.length > 0 && !board.lexicon.phrases.has(spacedOf(text, board)));
 
 const saysTwoVolumes = ({ findings }: Board): boolean =>
   new Set(findings.flatMap(({ field, value }) => (field === 'volume_L' ? [value] : []))).size > 1;

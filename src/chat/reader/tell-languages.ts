@@ -1,0 +1,75 @@
+import { phrasesOf } from './spellings.ts';
+import type { Language } from './understood.ts';
+import { ALL_WORDS } from './words/all.ts';
+import type { Tag, Words } from './words/words.ts';
+
+/** In which languages a message is written. */
+export interface ToldLanguages {
+  /** The one that most of its words are of; the chat's where they tell none. */
+  readonly first: Language;
+  /** Others, of which it holds words that the first has not. */
+  readonly others: readonly Language[];
+  /** Whether any word told it. */
+  readonly isTold: boolean;
+}
+
+/** Names and figures that are the same everywhere tell no language. */
+const TELLS_NONE = /^(cue:variety|unit:(L|mL|cL|hL|m3|g|mg|kg|ppm|mg\/L|C|F|none-of-ours)$)/;
+
+/** The languages that have a word, a bit each; a word of more languages tells less. */
+function languagesOfWords(lists: readonly Words[]): ReadonlyMap<string, number> {
+  const known = new Map<string, number>();
+  for (const [n, { language, says, own = {}, neverMended = [] }] of lists.entries()) {
+    const add = (entries: readonly string[]): void => {
+      for (const entry of entries) {
+        for (const phrase of phrasesOf(entry, language))
+          for (const word of phrase.split(' ')) known.set(word, (known.get(word) ?? 0) | (1 << n));
+      }
+    };
+    for (const [tag, entries] of Object.entries(says) as [Tag, readonly string[]][])
+      if (!TELLS_NONE.test(tag)) add(entries);
+    for (const entries of Object.values(own)) add(entries);
+    add(neverMended);
+  }
+  return known;
+}
+
+let known: ReadonlyMap<string, number> | undefined;
+
+/** Built when the first message comes. */
+const knownWords = (): ReadonlyMap<string, number> => (known ??= languagesOfWords(ALL_WORDS));
+
+const WORD = /\p{L}+/gu;
+
+const countOf = (mask: number): number => {
+  let n = 0;
+  for (let rest = mask; rest > 0; rest &= rest - 1) n++;
+  return n;
+};
+
+/**
+ * Tells a message's languages by its words: one that fewer languages share tells more. In a draw it is the chat's.
+ *
+ * @param text A folded message.
+ * @example
+ * ```ts
+ * tellLanguages('cuve 4 45hl libre 18', 'en').first // => 'fr'
+ * tellLanguages('t4 18 3.5', 'de').first // => 'de'
+ * ```
+ */
+export function tellLanguages(text: string, chat: Language): ToldLanguages {
+  const words = text.match(WORD) ?? [];
+  const masks = words.flatMap((word) => (word.length > 1 ? (knownWords().get(word) ?? []) : []));
+  const scoreOf = (n: number): number => {
+    let score = 0;
+    for (const mask of masks) if (mask & (1 << n)) score += 1 / countOf(mask);
+    return score;
+  };
+  const scores = ALL_WORDS.map(({ language }, n) => ({ language, n, score: scoreOf(n) }));
+  const own = scores.find(({ language }) => language === chat);
+  const best = scores.reduce((a, b) => (b.score > a.score + 1e-9 ? b : a), own ?? scores[0]!);
+  const isMissing = (n: number): boolean =>
+    words.some((word) => word.length > 2 && knownWords().get(word) === 1 << n);
+  const others = scores.filter(({ n }) => n !== best.n && isMissing(n)).map(({ language }) => language);
+  return { first: best.language, others, isTold: best.score > 0 };
+}
