@@ -38,12 +38,13 @@ export const isQuestion = (topic: string | undefined): topic is QuestionId =>
 
 /** What a message about one's own wine carries: with one of these it is no question about the trade. */
 const OF_ONES_WINE: readonly FieldName[] = [
-  'vessel', 'vessels', 'ph', 'total_mg_L', 'mass_g', 'additive_volume_mL', 'tablets', 'rate_mg_L', 'added_mg_L',
+  'vessel', 'vessels', 'volume_L', 'ph', 'total_mg_L', 'mass_g', 'additive_volume_mL', 'tablets', 'rate_mg_L', 'added_mg_L',
 ]; // prettier-ignore
 
-function isOfOnesWine({ intent, fields, marks }: Draft): boolean {
+function isOfOnesWine({ intent, fields, command }: Draft): boolean {
   if (intent === 'added' || intent === 'reading' || intent === 'titration') return true;
-  if (fields.volume_L !== undefined && !marks.spoon) return true;
+  // `remove sulfite from wine` reads as a person to be taken out; every other word of the bot's own is one.
+  if (command !== undefined && command.name !== 'remove-person') return true;
   return OF_ONES_WINE.some((name) => fields[name] !== undefined);
 }
 
