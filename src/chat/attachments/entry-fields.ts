@@ -1,7 +1,7 @@
 import type { AdditiveId } from '../../core/additives/additive-id.ts';
 import { BOUNDS } from '../../core/bounds.ts';
 import type { BoundedField } from '../../core/bounds.ts';
-import type { Entry, Happening, VesselEvent } from '../../core/cellar/entry.ts';
+import type { Entry, Happening, StockEvent, VesselEvent } from '../../core/cellar/entry.ts';
 import type { Category, Product, Stage, Style } from '../../core/wine.ts';
 
 type FieldsOf<T> = T extends unknown ? keyof T : never;
@@ -21,7 +21,7 @@ const bounded = (field: BoundedField): FieldForm => number(BOUNDS[field].min, BO
 
 /**
  * The form of each field. Figures lie in the bounds of core where it has some; other limits are own thresholds that
- * keep nonsense of a foreign hand out. An amount may be negative: stock that was taken out.
+ * keep nonsense of a foreign hand out.
  */
 export const FIELD_FORMS: Readonly<Record<EntryField, FieldForm>> = {
   entry: { is: 'count' },
@@ -58,7 +58,11 @@ export const FIELD_FORMS: Readonly<Record<EntryField, FieldForm>> = {
       unwatched: true,
       watched: true,
       forgotten: true,
-    } satisfies Record<VesselEvent, true>,
+      received: true,
+      used: true,
+      discarded: true,
+      counted: true,
+    } satisfies Record<VesselEvent | StockEvent, true>,
   },
   additive: {
     is: 'choice',
@@ -80,8 +84,8 @@ export const FIELD_FORMS: Readonly<Record<EntryField, FieldForm>> = {
   tablet_salt_g: bounded('tablet_salt_g'),
   chemical_lot: { is: 'text' },
   supplier: { is: 'text' },
-  mass_g: number(-100_000_000, 100_000_000),
-  additive_volume_mL: number(-10_000_000_000, 10_000_000_000),
+  mass_g: number(0, 100_000_000),
+  additive_volume_mL: number(0, 10_000_000_000),
   tablets: bounded('tablets'),
   SO2_g: number(0, 100_000_000),
   added_mg_L: bounded('added_mg_L'),
@@ -116,6 +120,14 @@ export const FIELD_FORMS: Readonly<Record<EntryField, FieldForm>> = {
       bottled: true,
     } satisfies Record<Stage, true>,
   },
+  designated_mg_L: number(0, 1000),
+  uplift: { is: 'yes-no' },
+  quality: { is: 'yes-no' },
+  pdo: { is: 'yes-no' },
+  bulk: { is: 'yes-no' },
+  density_kg_L: number(0.9, 1.3),
+  reserve_mg_L: number(0, 1000),
+  over_rule: { is: 'text' },
   lot: { is: 'text' },
   until: { is: 'time' },
   order: { is: 'count' },

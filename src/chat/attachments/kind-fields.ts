@@ -1,4 +1,4 @@
-import type { AdditiveNoted, Happening } from '../../core/cellar/entry.ts';
+import type { AdditiveNoted, Happening, StockEvent } from '../../core/cellar/entry.ts';
 import type { EntryField } from './entry-fields.ts';
 
 /** The kind of an entry. */
@@ -23,6 +23,13 @@ const TRAITS = {
   stage: 'may',
   alcohol_percent: 'may',
   sugar_g_L: 'may',
+  designated_mg_L: 'may',
+  uplift: 'may',
+  quality: 'may',
+  pdo: 'may',
+  bulk: 'may',
+  density_kg_L: 'may',
+  reserve_mg_L: 'may',
 } as const;
 
 const AMOUNT = {
@@ -42,6 +49,7 @@ const FIELDS: { readonly [H in Happening as H['kind']]: Readonly<Record<Held<H>,
     planned_mg_L: 'may',
     planned_free_mg_L: 'may',
     order: 'may',
+    over_rule: 'may',
     remark: 'may',
   },
   reading: {
@@ -70,14 +78,29 @@ const FIELDS: { readonly [H in Happening as H['kind']]: Readonly<Record<Held<H>,
   correction: { vessels: 'must', corrects: 'must', reason: 'must' },
   other: { vessels: 'must', remark: 'must', mass_g: 'may', additive_volume_mL: 'may' },
   stock: {
+    event: 'must',
     vessels: 'must',
     ...ADDITIVE,
     mass_g: 'may',
     additive_volume_mL: 'may',
+    tablets: 'may',
     supplier: 'may',
     remark: 'may',
   },
 };
+
+const STOCK_EVENTS: Readonly<Record<StockEvent, true>> = {
+  received: true,
+  used: true,
+  discarded: true,
+  counted: true,
+};
+
+/** Whether something of that name happens to what an entry of the kind is about. */
+export function isEventOf(kind: Kind, event: unknown): boolean {
+  const isOfStock = typeof event === 'string' && Object.hasOwn(STOCK_EVENTS, event);
+  return event === undefined || (kind === 'stock') === isOfStock;
+}
 
 /** What every entry has beside what it holds. */
 const NOTING = {

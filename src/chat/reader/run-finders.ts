@@ -3,6 +3,7 @@ import { findAdditiveVolume } from './finders/additive-volume.ts';
 import { findAdditive } from './finders/additive.ts';
 import { findAllowance } from './finders/allowance.ts';
 import { findBarrels } from './finders/barrels.ts';
+import { findLawFacts } from './finders/law-facts.ts';
 import { findKind } from './finders/kind.ts';
 import { findLabelled } from './finders/labels.ts';
 import { findLetterPair } from './finders/letter-pair.ts';
@@ -40,6 +41,7 @@ const FINDERS: readonly Finder[] = [
   findWhen,
   findLetterPair,
   findVessel,
+  findLawFacts,
   findOtherFigures,
   findSolutionUse,
   findOtherQuantities,

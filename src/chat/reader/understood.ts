@@ -25,6 +25,19 @@ export interface Fields {
   readonly category?: Category;
   readonly product?: Product;
   readonly organic?: true;
+  /** The step of the law for wines of a designation. */
+  readonly designated_mg_L?: number;
+  /** The year was declared a bad one, so that more is allowed. */
+  readonly uplift?: boolean;
+  /** Of a sparkling wine: the class that the law calls quality. */
+  readonly quality?: boolean;
+  /** Of the national scheme for protected names. */
+  readonly pdo?: true;
+  /** Bulk wine for export. */
+  readonly bulk?: true;
+  readonly density_kg_L?: number;
+  /** mg/L of the room below the limit that are kept for bottling. */
+  readonly reserve_mg_L?: number;
   readonly stage?: Stage;
   readonly additive?: AdditiveId;
   readonly strength_percent?: number;

@@ -1,7 +1,7 @@
 import type { AdditiveId } from '../additives/additive-id.ts';
 import type { Category, Product, Stage, Style } from '../wine.ts';
 
-/** What is told of a wine beside its readings. Alcohol in % vol, sugar in g/L. */
+/** What is told of a wine beside its readings. Alcohol in % vol, sugar in g/L, density in kg/L, SO2 in mg/L. */
 export interface WineTraits {
   readonly style?: Style;
   readonly category?: Category;
@@ -10,6 +10,19 @@ export interface WineTraits {
   readonly stage?: Stage;
   readonly alcohol_percent?: number;
   readonly sugar_g_L?: number;
+  /** The step of the law for wines of a designation, where somebody says that it is one: never inferred. */
+  readonly designated_mg_L?: number;
+  /** The authority has declared the year, so that more is allowed. */
+  readonly uplift?: boolean;
+  /** A sparkling wine of the class that the law calls quality. */
+  readonly quality?: boolean;
+  /** A wine of the national scheme for protected names. */
+  readonly pdo?: boolean;
+  /** Bulk wine for export. */
+  readonly bulk?: boolean;
+  readonly density_kg_L?: number;
+  /** What is kept of the room below the limit for an addition that is still to come, at bottling. */
+  readonly reserve_mg_L?: number;
 }
 
 /** An additive at hand as an entry keeps it: strength in %, a tablet's size in grams, the lot on its label. */
@@ -42,6 +55,8 @@ export interface Addition extends AdditiveNoted, AmountNoted {
   readonly planned_free_mg_L?: number;
   /** The order that it carries out, by its number. */
   readonly order?: number;
+  /** The rule of the law that it was known to pass when it was asked for all the same. */
+  readonly over_rule?: string;
   readonly remark?: string;
 }
 
@@ -111,12 +126,21 @@ export interface OtherAddition {
   readonly additive_volume_mL?: number;
 }
 
-/** What came into the chemical store, or was taken out of it otherwise than into wine; amounts in g or mL. */
+/** What happened to the chemical store. */
+export type StockEvent =
+  | 'received'
+  | 'used' // for equipment, or for a solution that is made up: for no wine
+  | 'discarded'
+  | 'counted'; // what there is, whatever the log says
+
+/** What came into the chemical store, went out of it otherwise than into wine, or was counted; in g, mL or tablets. */
 export interface StockMovement extends AdditiveNoted {
   readonly kind: 'stock';
+  readonly event: StockEvent;
   readonly vessels: readonly string[];
   readonly mass_g?: number;
   readonly additive_volume_mL?: number;
+  readonly tablets?: number;
   readonly supplier?: string;
   readonly remark?: string;
 }

@@ -9,4 +9,11 @@ export const TRAIT_NAMES = [
   'stage',
   'alcohol_percent',
   'sugar_g_L',
+  'designated_mg_L',
+  'uplift',
+  'quality',
+  'pdo',
+  'bulk',
+  'density_kg_L',
+  'reserve_mg_L',
 ] as const satisfies readonly (keyof WineTraits)[];

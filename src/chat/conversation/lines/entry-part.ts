@@ -7,6 +7,7 @@ import { vesselName, vesselNames } from '../../replies/vessel-name.ts';
 import { volumeText } from '../../replies/volume-text.ts';
 import type { Here } from '../here.ts';
 import { tellingOf } from '../telling.ts';
+import { lawFacts } from './law-facts.ts';
 import { part } from './line.ts';
 import { besideAmount, notedAmount } from './noted-amount.ts';
 
@@ -80,6 +81,7 @@ function toldParts(entry: VesselChange, unit: Here['settings']['volumeUnit'], ma
     ...(category === undefined ? [] : [part('fact-category', { category })]),
     ...(product === undefined ? [] : [part('fact-product', { product })]),
     ...(organic === true ? [part('fact-organic')] : []),
+    ...lawFacts(entry, mark),
     ...(stage === undefined ? [] : [part('fact-stage', { stage })]),
     ...(alcohol_percent === undefined
       ? []

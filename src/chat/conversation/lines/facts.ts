@@ -8,6 +8,7 @@ import type { SentenceKey } from '../../replies/sentence-keys.ts';
 import type { Manner } from '../manner.ts';
 import { countOf } from '../to-requests.ts';
 import { saidFields } from '../recall.ts';
+import { lawFacts } from './law-facts.ts';
 import { listLine, part } from './line.ts';
 import { targetValues } from './target-text.ts';
 
@@ -50,6 +51,7 @@ function wordsOf(fields: Fields, manner: Manner): Part[] {
   if (fields.category) words.push(part('fact-category', { category: fields.category }));
   if (fields.product) words.push(part('fact-product', { product: fields.product }));
   if (fields.organic) words.push(part('fact-organic'));
+  words.push(...lawFacts(fields, manner.mark));
   if (fields.stage) words.push(part('fact-stage', { stage: fields.stage }));
   if (fields.target) words.push(part('fact-target', targetValues(fields.target, manner)));
   words.push(...tabletOf(fields, manner));

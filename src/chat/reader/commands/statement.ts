@@ -40,17 +40,23 @@ function hasCompany(board: Board, i: number): boolean {
   return isJoined || !/^\d*[.,]\d+$/.test(termAt(board, i).text) || next.kind === 'word';
 }
 
+/** Words of what the law asks about a wine: the figure beside one has a meaning, and its unit is no reading's. */
+const OF_THE_LAW: readonly Tag[] = ['cue:designated', 'cue:density', 'cue:keep', 'cue:bottling-reserve'];
+
+const isAboutLaw = ({ cues }: Board): boolean => OF_THE_LAW.some((tag) => cues.has(tag));
+
 /** Whether a vessel could be named, and no figure stands alone that no statement has. */
 function mayBeStatement(board: Board): boolean {
   let isNamed = false;
   const isAcid = board.pieces.some(({ ids }) => ids.includes('acidified'));
+  const isOfLaw = isAboutLaw(board);
   for (let i = 0; i < board.terms.length; i++) {
     const term = termAt(board, i);
     if (isVesselWord(term)) isNamed = true;
     if (term.kind !== 'number') continue;
     const before = termAt(board, i - 1);
     if (before.text === 't' || (!term.gap && (before.kind === 'word' || before.text === '-'))) isNamed = true;
-    if (!hasCompany(board, i) && !isAcid) return false;
+    if (!hasCompany(board, i) && !isAcid && !isOfLaw) return false;
   }
   return isNamed;
 }
@@ -62,7 +68,8 @@ function mayBeStatement(board: Board): boolean {
 export function readStatement(board: Board): Draft | undefined {
   const last = termAt(board, board.terms.length - 1);
   if (board.terms.length > MOST_TERMS || last.text === '?') return undefined;
-  if (OF_A_DOSE.some((tag) => board.cues.has(tag)) || !mayBeStatement(board)) return undefined;
+  const ofADose = isAboutLaw(board) ? OF_A_DOSE.filter((tag) => !tag.startsWith('unit:')) : OF_A_DOSE;
+  if (ofADose.some((tag) => board.cues.has(tag)) || !mayBeStatement(board)) return undefined;
   const lot = readLot(board);
   if (lot) return lot;
   const tale = taleOf(board);

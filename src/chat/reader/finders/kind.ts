@@ -35,8 +35,11 @@ export function findKind(board: Board): void {
     if (product && isStranger(board, i + 1)) continue;
     if (category && (isStranger(board, i - 1) || isStranger(board, i + 1) || isThanks(board, i))) continue;
     if (style) find(board, 'style', style, 'labelled', i, i);
-    else if (category) find(board, 'category', category, 'labelled', i, i);
-    else if (product) find(board, 'product', product, 'labelled', i, i);
+    else if (category) {
+      find(board, 'category', category, 'labelled', i, i);
+      if (isCue(board, i, 'quality')) find(board, 'quality', true, 'labelled', i, i);
+      if (isCue(board, i, 'other-sparkling')) find(board, 'quality', false, 'labelled', i, i);
+    } else if (product) find(board, 'product', product, 'labelled', i, i);
     else if (hasTag(board, i, 'organic')) find(board, 'organic', true, 'labelled', i, i);
   }
 }

@@ -5,12 +5,8 @@ import { aimAt } from '../../../../src/core/dose/aim.ts';
 import { CASES, OPTIONS, addition, day, entriesOf, reading } from './chart-cases.ts';
 import type { Told } from './chart-cases.ts';
 
-const told = (event: VesselEvent, at: number, more: Told = {}): Told => ({
-  kind: 'vessel',
-  event,
-  at: day(at),
-  ...more,
-});
+const told = (event: VesselEvent, at: number, more: Told = {}): Told =>
+  ({ kind: 'vessel', event, at: day(at), ...more }) as Told;
 const chart = (entries: readonly Told[], options = {}): ReturnType<typeof chartOf> =>
   chartOf(entriesOf(entries), { ...OPTIONS, ...options });
 
@@ -25,7 +21,7 @@ test('readings and additions are there with their figures, in the order of time 
     additions: [{ at: day(2) }, { at: day(4), added_mg_L: 30 }],
     limit_mg_L: 150,
   });
-});
+} as Told);
 
 test.each<[string, Told[]]>([
   ['nothing at all', []],

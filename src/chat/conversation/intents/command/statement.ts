@@ -1,9 +1,10 @@
-import type { VesselChange, VesselEvent } from '../../../../core/cellar/entry.ts';
+import type { VesselChange, VesselEvent, WineTraits } from '../../../../core/cellar/entry.ts';
+import { TRAIT_NAMES } from '../../../../core/cellar/trait-names.ts';
 import type { Vessel } from '../../../../core/cellar/vessel.ts';
 import { holdsWine } from '../../../../core/cellar/pour.ts';
 import { DAY_ms } from '../../../../core/time/durations.ts';
 import type { Command } from '../../../reader/command.ts';
-import type { Reading } from '../../../reader/understood.ts';
+import type { Fields, Reading } from '../../../reader/understood.ts';
 import { dayText, momentText } from '../../../replies/moment-text.ts';
 import type { Line } from '../../../replies/reply.ts';
 import { vesselName, vesselNames } from '../../../replies/vessel-name.ts';
@@ -73,7 +74,6 @@ export function answerStatement(reading: Reading, turn: Turn): Outcome | undefin
 function changeOf(reading: Reading, command: Command, event: VesselEvent, here: Here): VesselChange {
   const { fields, remark } = reading;
   const vessels = vesselsIn(fields);
-  const { style, category, product, organic, stage, alcohol_percent, sugar_g_L } = fields;
   const volume_L = fields.volume_L === undefined ? undefined : fields.volume_L / vessels.length;
   const from = command.name === 'topped' ? command.from : undefined;
   const said = remark ?? (from === undefined ? undefined : vesselName(from));
@@ -85,15 +85,16 @@ function changeOf(reading: Reading, command: Command, event: VesselEvent, here: 
     ...(command.name === 'lot' && { lot: command.lot }),
     ...(command.name === 'later' && { until: here.message.at + command.days * DAY_ms }),
     ...(volume_L !== undefined && (command.name === 'capacity' ? { capacity_L: volume_L } : { volume_L })),
-    ...(style && { style }),
-    ...(category && { category }),
-    ...(product && { product }),
-    ...(organic !== undefined && { organic }),
-    ...(stage && { stage }),
-    ...(alcohol_percent !== undefined && { alcohol_percent }),
-    ...(sugar_g_L !== undefined && { sugar_g_L }),
+    ...traitsOf(fields),
     ...(said !== undefined && { remark: said }),
   };
+}
+
+/** What is told of the wine, by the names that an entry has for it. */
+function traitsOf(fields: Fields): WineTraits {
+  return Object.fromEntries(
+    TRAIT_NAMES.flatMap((name) => (fields[name] === undefined ? [] : [[name, fields[name]]])),
+  );
 }
 
 /** What the statement makes void, or leads to, as values of the sentence. */

@@ -1,5 +1,6 @@
 import { nextCheck } from '../../../../core/cellar/next-check.ts';
-import type { Known, Vessel } from '../../../../core/cellar/vessel.ts';
+import type { WineTraits } from '../../../../core/cellar/entry.ts';
+import type { Known, KnownTraits, Vessel } from '../../../../core/cellar/vessel.ts';
 import type { Fields } from '../../../reader/understood.ts';
 import { dayText, momentText } from '../../../replies/moment-text.ts';
 import { numberText } from '../../../replies/number-text.ts';
@@ -9,6 +10,7 @@ import { vesselName } from '../../../replies/vessel-name.ts';
 import { volumeText } from '../../../replies/volume-text.ts';
 import { checkSettingsOf } from '../../check-settings-of.ts';
 import type { Here } from '../../here.ts';
+import { lawFacts } from '../../lines/law-facts.ts';
 import { line, listLine, part } from '../../lines/line.ts';
 import { notedAmount } from '../../lines/noted-amount.ts';
 import { nameText, whoText } from '../../people.ts';
@@ -65,10 +67,15 @@ function contentOf({ traits, volume_L, capacity_L, lot }: Vessel, { settings, me
     ...(category ? [part('fact-category', { category: category.value })] : []),
     ...(product ? [part('fact-product', { product: product.value })] : []),
     ...(organic?.value === true ? [part('fact-organic')] : []),
+    ...lawFacts(valuesOf(traits), mark),
     ...(stage ? [part('fact-stage', { stage: stage.value })] : []),
     ...(alcohol_percent ? [part('fact-alcohol', { percent: said(alcohol_percent.value) })] : []),
     ...(sugar_g_L ? [part('fact-sugar', { sugar: said(sugar_g_L.value) })] : []),
   ];
+}
+
+function valuesOf(traits: KnownTraits): WineTraits {
+  return Object.fromEntries(Object.entries(traits).map(([name, { value }]) => [name, value]));
 }
 
 function readings(vessel: Vessel, here: Here): Part[] {
