@@ -21,7 +21,7 @@ test('readings and additions are there with their figures, in the order of time 
     additions: [{ at: day(2) }, { at: day(4), added_mg_L: 30 }],
     limit_mg_L: 150,
   });
-} as Told);
+});
 
 test.each<[string, Told[]]>([
   ['nothing at all', []],
