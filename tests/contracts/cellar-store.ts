@@ -7,6 +7,7 @@ import type { CreateStore } from './cellar-store/notes.ts';
 import { testMailbox } from './cellar-store/mailbox.ts';
 import { testPeople } from './cellar-store/people.ts';
 import { testProjection } from './cellar-store/projection.ts';
+import { testStock } from './cellar-store/stock.ts';
 import { testTurns } from './cellar-store/turns.ts';
 
 /** What every store of cellars has to do; each implementation runs it, with so many random logs. */
@@ -35,6 +36,9 @@ export function testCellarStore(name: string, create: CreateStore, { anyLogs }: 
     });
     describe('derives vessels from the log', () => {
       testProjection(create, anyLogs);
+    });
+    describe('derives the chemical store from the log', () => {
+      testStock(create, anyLogs);
     });
   });
 }

@@ -1,7 +1,7 @@
 import type { Entry } from '../../core/cellar/entry.ts';
 import type { EntryField } from './entry-fields.ts';
 import type { EntryFields, FieldValue } from './fields-of-entry.ts';
-import { USUAL_FIELDS, fieldsOfKind } from './kind-fields.ts';
+import { USUAL_FIELDS, fieldsOfKind, isEventOf } from './kind-fields.ts';
 import type { Kind } from './kind-fields.ts';
 
 /** What stands for a field that an entry must have and that an empty cell leaves out. */
@@ -15,6 +15,7 @@ export function entryOfFields(fields: EntryFields): Entry | undefined {
   if (fields.kind === undefined) return undefined;
   const known = fieldsOfKind(fields.kind as Kind);
   if (Object.keys(fields).some((name) => !Object.hasOwn(known, name))) return undefined;
+  if (!isEventOf(fields.kind as Kind, fields.event)) return undefined;
   const entry: Record<string, unknown> = {};
   const usual: Record<string, unknown> = {};
   for (const [field, need] of Object.entries(known) as [EntryField, 'must' | 'may'][]) {

@@ -1,5 +1,6 @@
 import type { LoggedEntry, NewEntry } from './entry.ts';
 import type { Mailbox, Post } from './mailbox.ts';
+import type { Shelf } from './shelf.ts';
 import type { Vessel } from './vessel.ts';
 
 /** Somebody who notes things: a number in this cellar, and the name that is shown. */
@@ -46,6 +47,8 @@ export interface CellarView {
   vessel(name: string): Promise<Vessel | undefined>;
   /** All vessels, by name. */
   vessels(): Promise<readonly Vessel[]>;
+  /** The shelves of the chemical store, by name; none where nothing was ever received or counted. */
+  shelves(): Promise<readonly Shelf[]>;
   /** The person that the platform knows by this id; undefined where they are new here. */
   person(id: string): Promise<Person | undefined>;
   people(): Promise<readonly Person[]>;

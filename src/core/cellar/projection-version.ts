@@ -1,5 +1,5 @@
 /**
- * Which rule `applyEntry` follows, a plain count. Raise it by one with every change of what an entry does to a vessel or
- * of how a vessel is kept: a store that holds vessels by another rule derives them anew when it is opened.
+ * Which rule `applyEntry` follows, a plain count. Raise it by one with every change of what an entry does to a vessel
+ * or a shelf, or of how one is kept: a store that holds them by another rule derives them anew when it is opened.
  */
-export const PROJECTION_VERSION = 1;
+export const PROJECTION_VERSION = 2;

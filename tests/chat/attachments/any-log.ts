@@ -3,7 +3,7 @@ import type { Person } from '../../../src/core/cellar/cellar-store.ts';
 import type { Entry, LoggedEntry } from '../../../src/core/cellar/entry.ts';
 import { FIELD_FORMS } from '../../../src/chat/attachments/entry-fields.ts';
 import type { EntryField } from '../../../src/chat/attachments/entry-fields.ts';
-import { USUAL_FIELDS, fieldsOfKind } from '../../../src/chat/attachments/kind-fields.ts';
+import { USUAL_FIELDS, fieldsOfKind, isEventOf } from '../../../src/chat/attachments/kind-fields.ts';
 import type { Kind } from '../../../src/chat/attachments/kind-fields.ts';
 
 const KINDS = Object.keys({
@@ -59,7 +59,7 @@ const name = fc.oneof(
 
 const moment = fc.integer({ min: Date.UTC(2025, 11, 1), max: Date.UTC(2027, 0, 31) });
 
-function valueOf(field: EntryField): fc.Arbitrary<unknown> {
+function valueOf(field: EntryField, kind: Kind): fc.Arbitrary<unknown> {
   const form = FIELD_FORMS[field];
   switch (form.is) {
     case 'text':
@@ -73,7 +73,9 @@ function valueOf(field: EntryField): fc.Arbitrary<unknown> {
     case 'yes-no':
       return fc.boolean();
     case 'choice':
-      return fc.constantFrom(...Object.keys(form.of));
+      return fc.constantFrom(
+        ...Object.keys(form.of).filter((one) => field !== 'event' || isEventOf(kind, one)),
+      );
     case 'number':
       return fc.oneof(
         fc.double({ min: form.min, max: form.max, noNaN: true }).map((one) => (one === 0 ? 0 : one)),
@@ -86,7 +88,7 @@ function valueOf(field: EntryField): fc.Arbitrary<unknown> {
 function happening(kind: Kind): fc.Arbitrary<Record<string, unknown>> {
   const fields = Object.entries(fieldsOfKind(kind)) as [EntryField, 'must' | 'may'][];
   const own = fields.filter(([field]) => !NOTED.includes(field));
-  const shape = Object.fromEntries(own.map(([field]) => [field, valueOf(field)]));
+  const shape = Object.fromEntries(own.map(([field]) => [field, valueOf(field, kind)]));
   const required = own.flatMap(([field, need]) => (need === 'must' ? [field] : []));
   return fc.record(shape, { requiredKeys: required }).map((held) => {
     if (kind !== 'vessel') return held;

@@ -75,20 +75,76 @@ const happening = fc.oneof(
   },
 );
 
-const step: fc.Arbitrary<Step> = fc.oneof(
+const stepOf = (what: fc.Arbitrary<object>): fc.Arbitrary<Step> =>
+  fc.oneof(
+    {
+      weight: 5,
+      arbitrary: fc.record({
+        note: fc
+          .tuple(at, what)
+          .map(([when, one]) => note(when, { ph: undefined, ...one } as Partial<NewEntry>)),
+      }),
+    },
+    { weight: 1, arbitrary: fc.record({ takeBack: fc.nat() }) },
+  );
+
+const additive = fc.constantFrom('potassium-metabisulfite', 'sodium-metabisulfite');
+const chemical_lot = fc.constantFrom('A', 'b', undefined);
+
+/** What comes in, goes out and is counted; some of it of tablets of two sizes. */
+const stockHappening = fc.oneof(
   {
-    weight: 5,
+    weight: 4,
     arbitrary: fc.record({
-      note: fc.tuple(at, happening).map(([when, what]) => note(when, what as Partial<NewEntry>)),
+      kind: fc.constant('addition'),
+      vessels: vessel.map((one) => [one]),
+      additive,
+      chemical_lot,
+      mass_g: fc.integer({ min: 1, max: 2000 }).map((tenths) => tenths / 10),
     }),
   },
-  { weight: 1, arbitrary: fc.record({ takeBack: fc.nat() }) },
+  {
+    weight: 4,
+    arbitrary: fc.record({
+      kind: fc.constant('stock'),
+      event: fc.constantFrom('received', 'received', 'used', 'discarded', 'counted'),
+      vessels: fc.constant([]),
+      additive,
+      chemical_lot,
+      mass_g: fc.integer({ min: 0, max: 1000 }),
+    }),
+  },
+  {
+    weight: 1,
+    arbitrary: fc.record({
+      kind: fc.constantFrom('stock', 'addition'),
+      event: fc.constantFrom('received', 'counted'),
+      vessels: fc.constant(['tank 1']),
+      additive: fc.constant('tablet'),
+      tablet_SO2_g: fc.constantFrom(2, 5),
+      tablets: fc.integer({ min: 1, max: 50 }),
+    }),
+  },
 );
 
 /** Turns of a random log: late entries, corrections, wine that goes from vessel to vessel. */
 export const anyTurns = (length: number): fc.Arbitrary<readonly (readonly NewEntry[])[]> =>
   fc
-    .array(fc.array(step, { minLength: 1, maxLength: 4 }), { minLength: 1, maxLength: length, size: 'max' })
+    .array(fc.array(stepOf(happening), { minLength: 1, maxLength: 4 }), {
+      minLength: 1,
+      maxLength: length,
+      size: 'max',
+    })
+    .map(withNumbers);
+
+/** Turns of the random log of a chemical store. */
+export const anyStockTurns = (length: number): fc.Arbitrary<readonly (readonly NewEntry[])[]> =>
+  fc
+    .array(fc.array(stepOf(stockHappening), { minLength: 1, maxLength: 4 }), {
+      minLength: 1,
+      maxLength: length,
+      size: 'max',
+    })
     .map(withNumbers);
 
 /** Gives each its key, and turns "take one back" into a correction of an entry that stands. */

@@ -33,6 +33,8 @@ export interface MemoryCellar {
   readonly standings: Map<string, string>;
   /** Waypoints as JSON, by their place as JSON. */
   readonly waypoints: Map<string, string>;
+  /** Shelves of the chemical store as JSON, by name. */
+  readonly shelves: Map<string, string>;
   readonly kept: Map<string, { readonly text: string; readonly until: number | undefined }>;
   /** By number. */
   readonly people: Map<number, { readonly id: string | undefined; readonly name: string | undefined }>;
@@ -47,6 +49,7 @@ export const emptyCellar = (): MemoryCellar => ({
   corrections: new Map(),
   standings: new Map(),
   waypoints: new Map(),
+  shelves: new Map(),
   kept: new Map(),
   people: new Map(),
   due: new Map(),

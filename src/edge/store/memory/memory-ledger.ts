@@ -1,3 +1,5 @@
+import type { Shelf } from '../../../core/cellar/shelf.ts';
+import { stockMove } from '../../../core/cellar/stock-move.ts';
 import type { Ledger, WaypointPlace } from '../projection/ledger.ts';
 import { comparePoints, type Point } from '../projection/point.ts';
 import type { Standing } from '../projection/standing.ts';
@@ -71,6 +73,18 @@ export function createMemoryLedger(cellar: MemoryCellar, change: Undoable): Ledg
       for (const [vessel, standing] of standings)
         if (standing === undefined) change.remove(cellar.standings, vessel);
         else change.set(cellar.standings, vessel, JSON.stringify(standing));
+    },
+    shelves: async () => Array.from(cellar.shelves.values(), (text) => JSON.parse(text) as Shelf),
+    saveShelves: async (shelves) => {
+      for (const [name, shelf] of shelves)
+        if (shelf === undefined) change.remove(cellar.shelves, name);
+        else change.set(cellar.shelves, name, JSON.stringify(shelf));
+    },
+    movesOf: async (additive, from) => {
+      const since = cellar.log.filter((one) => counts(cellar, one) && comparePoints(one, from) >= 0);
+      return inOrder(since)
+        .map(entryOf)
+        .filter((entry) => stockMove(entry)?.kind.additive === additive);
     },
   };
 }

@@ -1,4 +1,5 @@
 import type { CellarView, Person } from '../../../core/cellar/cellar-store.ts';
+import type { Shelf } from '../../../core/cellar/shelf.ts';
 import type { Vessel } from '../../../core/cellar/vessel.ts';
 import type { Standing } from '../projection/standing.ts';
 import { counts, entryOf, inOrder, loggedOf, type MemoryCellar } from './memory-cellar.ts';
@@ -37,6 +38,10 @@ export function createMemoryView(cellar: MemoryCellar, now: () => number): Cella
       const states = Array.from(cellar.standings.values(), stateOf).filter((state) => state !== undefined);
       return states.sort((one, other) => (one.vessel < other.vessel ? -1 : 1));
     },
+    shelves: async () =>
+      Array.from(cellar.shelves.values(), (text) => JSON.parse(text) as Shelf).sort((one, other) =>
+        one.shelf < other.shelf ? -1 : 1,
+      ),
     person: async (id) => {
       const found = [...cellar.people].find(([, person]) => person.id === id);
       return found && toPerson(found[0], found[1].name);

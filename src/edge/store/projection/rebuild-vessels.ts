@@ -1,10 +1,12 @@
 import { isDeepStrictEqual } from 'node:util';
+import type { Shelf } from '../../../core/cellar/shelf.ts';
 import { fold } from './fold.ts';
 import type { Ledger, WaypointPlace } from './ledger.ts';
 import type { Point } from './point.ts';
+import { foldShelves } from './project-shelves.ts';
 import { isWaypoint, type Standing } from './standing.ts';
 
-/** What was derived anew, and the vessels of which something else had been kept. */
+/** What was derived anew, and the vessels (and shelves) of which something else had been kept. */
 export interface Rebuilt {
   readonly vessels: number;
   readonly differed: readonly string[];
@@ -24,6 +26,7 @@ export async function rebuildVessels(
   apart: (work: () => Promise<void>) => Promise<void>,
 ): Promise<Rebuilt> {
   const standings = new Map<string, Standing>();
+  const shelves = new Map<string, Shelf>();
   const differed = new Set<string>();
   const leftOver = new Map((await ledger.waypointPlaces()).map((place) => [nameOf(place), place]));
 
@@ -40,8 +43,10 @@ export async function rebuildVessels(
     after = entries.at(-1);
     if (after === undefined) break;
     await apart(async () => {
-      for (const entry of entries)
+      for (const entry of entries) {
+        foldShelves(shelves, entry);
         for (const standing of fold(standings, entry)) if (isWaypoint(standing)) await mend(standing);
+      }
     });
   }
 
@@ -55,16 +60,26 @@ export async function rebuildVessels(
     for (const vessel of changed) differed.add(vessel);
     const now = new Map(changed.map((vessel) => [vessel, standings.get(vessel)]));
     await ledger.save({ voidFrom: new Map(), waypoints: [], standings: now });
+    for (const shelf of await mendShelves(ledger, shelves)) differed.add(shelf);
   });
   const vessels = [...standings.values()].filter(({ state }) => state !== undefined).length;
   return { vessels, differed: [...differed].toSorted() };
 }
 
+/** Keeps the shelves as they follow from the log; gives back those of which something else had been kept. */
+async function mendShelves(ledger: Ledger, shelves: ReadonlyMap<string, Shelf>): Promise<readonly string[]> {
+  const kept = new Map((await ledger.shelves()).map((shelf) => [shelf.shelf, shelf]));
+  const names = [...new Set([...kept.keys(), ...shelves.keys()])];
+  const changed = names.filter((name) => !isSame(shelves.get(name), kept.get(name)));
+  if (changed.length > 0) await ledger.saveShelves(new Map(changed.map((name) => [name, shelves.get(name)])));
+  return changed;
+}
+
 const nameOf = ({ vessel, at, entry }: WaypointPlace): string => JSON.stringify([vessel, at, entry]);
 
 /** Compared as they are kept: a field that is undefined is not kept. */
-const isSame = (derived: Standing | undefined, kept: Standing | undefined): boolean =>
+const isSame = <T>(derived: T | undefined, kept: T | undefined): boolean =>
   isDeepStrictEqual(asKept(derived), asKept(kept));
 
-const asKept = (standing: Standing | undefined): unknown =>
-  standing === undefined ? undefined : JSON.parse(JSON.stringify(standing));
+const asKept = (derived: unknown): unknown =>
+  derived === undefined ? undefined : JSON.parse(JSON.stringify(derived));

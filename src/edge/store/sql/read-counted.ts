@@ -56,6 +56,25 @@ export async function readCounted(
   return rows.map(toEntry);
 }
 
+/** What counts of the stock of an additive, and of additions of it, from a point on, in order. */
+export async function readMovesOf(
+  db: Kysely<Tables>,
+  { cellar, additive }: { readonly cellar: string; readonly additive: string },
+  from: Point,
+): Promise<readonly Entry[]> {
+  const rows = await db
+    .selectFrom('entry')
+    .select(COLUMNS)
+    .where('entry.cellar', '=', cellar)
+    .where('entry.additive', '=', additive)
+    .where(placed('entry', '>=', from))
+    .where(isNotTakenBack)
+    .orderBy('entry.at')
+    .orderBy('entry.entry')
+    .execute();
+  return rows.map(toEntry);
+}
+
 const isNotTakenBack = (eb: ExpressionBuilder<Tables, 'entry'>) =>
   eb.not(
     eb.exists(

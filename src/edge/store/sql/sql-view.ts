@@ -12,6 +12,7 @@ import {
   readNextEntry,
 } from './read-entries.ts';
 import { readVessel, readVessels } from './read-vessels.ts';
+import { readShelves } from './shelves.ts';
 import type { Tables } from './tables.ts';
 
 /** How the tables of a cellar are looked at. `now` is milliseconds since 1970. */
@@ -37,6 +38,7 @@ export function createSqlView(db: Kysely<Tables>, { cellar, now, onRead }: SqlVi
     lastEntryBy: (person) => readLastEntryBy(looking(), cellar, person),
     vessel: (name) => readVessel(looking(), cellar, name),
     vessels: () => readVessels(looking(), cellar),
+    shelves: () => readShelves(looking(), cellar),
     person: (id) => readPerson(looking(), cellar, id),
     people: () => readPeople(looking(), cellar),
     kept: (key) => readKept(looking(), cellar, { key, now: now() }),

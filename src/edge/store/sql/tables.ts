@@ -1,13 +1,15 @@
-import type { Generated } from 'kysely';
+import type { Generated, GeneratedAlways } from 'kysely';
 import type { Arrived, Post } from '../../../core/cellar/mailbox.ts';
 
 /** The tables, as the queries of Kysely know them. Times are milliseconds since 1970. */
 export interface Tables {
   readonly cellar: { readonly cellar: string };
-  readonly entry: EntryRow;
+  readonly entry: EntryRow & { readonly additive: GeneratedAlways<string | null> };
   readonly touched: { readonly cellar: string; readonly vessel: string } & PlaceRow;
   readonly vessel: StandingRow;
   readonly waypoint: StandingRow;
+  /** What of an additive stands on its shelf; `state` is JSON. */
+  readonly shelf: { readonly cellar: string; readonly shelf: string; readonly state: string };
   readonly kept: {
     readonly cellar: string;
     readonly key: string;

@@ -36,7 +36,7 @@ test('a file of a newer version is refused with a sentence, and left as it is', 
   change(path, `pragma user_version = ${MIGRATIONS.length + 1}`);
   const before = readFileSync(path);
   await expect(open(path)).rejects.toThrow(
-    /cellar\.db was written by a newer brimnote \(form 4; this one knows 3\): /,
+    /cellar\.db was written by a newer brimnote \(form 5; this one knows 4\): /,
   );
   await expect(open(path)).rejects.toBeInstanceOf(OperatorError);
   await expect(openSqliteReader(path, { now: () => 0 })).rejects.toThrow(/newer brimnote/);

@@ -61,6 +61,9 @@ async function askAll(connection: DatabaseSync): Promise<void> {
     view.person('id'),
     view.people(),
   ]);
+  await view.shelves();
+  await ledger.saveShelves(new Map([['powder', undefined]]));
+  await ledger.movesOf('potassium-metabisulfite', place);
   await Promise.all([view.kept('k'), view.keptUnder('k'), view.keptUnder(''), view.due('a'), view.allDue()]);
   await Promise.all([
     readNextDue(db),
