@@ -2,24 +2,26 @@ import type { Kysely } from 'kysely';
 import type { Write } from '../../../core/cellar/cellar-store.ts';
 import type { Arrived, Mailbox, Waiting } from '../../../core/cellar/mailbox.ts';
 import { inParts } from './in-parts.ts';
-import type { Tables } from './tables.ts';
+import { readyQuery } from './ready-query.ts';
+import type { ArrivedRow, Tables } from './tables.ts';
+
+const keep = readyQuery((db, row: ArrivedRow) =>
+  db
+    .insertInto('arrived')
+    .values(row)
+    .onConflict((on) => on.doNothing()),
+);
 
 /** Keeps what arrived; gives back what was not known. */
 export async function keepArrived(db: Kysely<Tables>, arrived: readonly Arrived[]): Promise<Arrived[]> {
-  const fresh = new Set<string>();
-  for (const part of inParts(arrived)) {
-    const rows = part.map(({ channel, number, body, received_at }) => {
-      return { channel, number, body, received_at, tries: 0, handled_at: null, cause: null };
-    });
-    const insert = db.insertInto('arrived').values(rows);
-    const kept = insert.onConflict((on) => on.doNothing()).returning(['channel', 'number']);
-    for (const row of await kept.execute()) fresh.add(nameOf(row));
+  const fresh: Arrived[] = [];
+  for (const one of arrived) {
+    const { channel, number, body, received_at } = one;
+    const row = { channel, number, body, received_at, tries: 0, handled_at: null, cause: null };
+    if ((await keep(db, row)).numAffectedRows === 1n) fresh.push(one);
   }
-  // What stands twice in the list is new once.
-  return arrived.filter((one) => fresh.delete(nameOf(one)));
+  return fresh;
 }
-
-const nameOf = ({ channel, number }: Pick<Arrived, 'channel' | 'number'>): string => `${number} ${channel}`;
 
 /** What waits to be handled, the lowest number first. */
 export async function readWaiting(db: Kysely<Tables>, channel: string): Promise<Waiting[]> {
@@ -45,6 +47,24 @@ export async function countTries(
       .execute();
 }
 
+/** Absent: stays as it is. */
+type End = {
+  readonly channel: string;
+  readonly number: number;
+  readonly now: number;
+  readonly body: string | undefined;
+  readonly cause: string | undefined;
+};
+
+const end = readyQuery((db, { channel, number, now, body, cause }: End) =>
+  db
+    .updateTable('arrived')
+    .set({ handled_at: now, ...(body !== undefined && { body }), ...(cause !== undefined && { cause }) })
+    .where('channel', '=', channel)
+    .where('number', '=', number)
+    .where('handled_at', 'is', null),
+);
+
 /**
  * What arrived is handled; what it said goes, unless it is put aside.
  *
@@ -55,13 +75,9 @@ export async function markHandled(
   { channel, number, cause }: Extract<Write, { kind: 'handled' }>,
   now: number,
 ): Promise<void> {
-  const done = { handled_at: now, ...(cause === undefined ? { body: '' } : { cause }) };
-  const update = db.updateTable('arrived').set(done).where('channel', '=', channel);
-  const { numUpdatedRows } = await update
-    .where('number', '=', number)
-    .where('handled_at', 'is', null)
-    .executeTakeFirst();
-  if (numUpdatedRows !== 1n) throw new RangeError(`${channel} ${number} does not wait to be handled`);
+  const body = cause === undefined ? '' : undefined;
+  const { numAffectedRows } = await end(db, { channel, number, now, body, cause });
+  if (numAffectedRows !== 1n) throw new RangeError(`${channel} ${number} does not wait to be handled`);
 }
 
 /** Forgets what was handled or put aside long ago, the oldest first. */

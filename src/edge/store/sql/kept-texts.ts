@@ -1,5 +1,6 @@
 import type { Kysely } from 'kysely';
 import { pastPrefix } from '../past-prefix.ts';
+import { readyQuery } from './ready-query.ts';
 import type { Tables } from './tables.ts';
 
 /** A text that is kept under a key, for ever or until a moment. */
@@ -9,12 +10,29 @@ export interface KeptText {
   readonly until?: number;
 }
 
-const unlapsed = (db: Kysely<Tables>, cellar: string, now: number) =>
+const unlapsed = (db: Kysely<Tables>, { cellar, now }: { readonly cellar: string; readonly now: number }) =>
   db
     .selectFrom('kept')
     .select(['key', 'text'])
     .where('cellar', '=', cellar)
     .where((eb) => eb.or([eb('until', 'is', null), eb('until', '>', now)]));
+
+type OfCellar = { readonly cellar: string; readonly now: number };
+
+const underKey = readyQuery((db, { key, ...of }: OfCellar & { readonly key: string }) =>
+  unlapsed(db, of).where('key', '=', key),
+);
+
+const underKeys = readyQuery((db, { keys, ...of }: OfCellar & { readonly keys: readonly string[] }) =>
+  unlapsed(db, of).where('key', 'in', keys),
+);
+
+const between = readyQuery(
+  (db, { begin, past, ...of }: OfCellar & { readonly begin: string; readonly past: string | undefined }) =>
+    unlapsed(db, of)
+      .where('key', '>=', begin)
+      .$if(past !== undefined, (query) => query.where('key', '<', past ?? '')),
+);
 
 /** The text under a key, unless it has lapsed. */
 export async function readKept(
@@ -22,7 +40,7 @@ export async function readKept(
   cellar: string,
   { key, now }: { readonly key: string; readonly now: number },
 ): Promise<string | undefined> {
-  return (await unlapsed(db, cellar, now).where('key', '=', key).executeTakeFirst())?.text;
+  return (await underKey(db, { cellar, now, key })).rows[0]?.text;
 }
 
 /** The texts under some keys that have not lapsed, by key. */
@@ -32,7 +50,7 @@ export async function readKeptOf(
   { keys, now }: { readonly keys: readonly string[]; readonly now: number },
 ): Promise<ReadonlyMap<string, string>> {
   if (keys.length === 0) return new Map();
-  const rows = await unlapsed(db, cellar, now).where('key', 'in', keys).execute();
+  const { rows } = await underKeys(db, { cellar, now, keys });
   return new Map(rows.map(({ key, text }) => [key, text]));
 }
 
@@ -42,13 +60,29 @@ export async function readKeptUnder(
   cellar: string,
   { begin, now }: { readonly begin: string; readonly now: number },
 ): Promise<readonly KeptText[]> {
-  const past = pastPrefix(begin);
-  const rows = await unlapsed(db, cellar, now)
-    .where('key', '>=', begin)
-    .$if(past !== undefined, (query) => query.where('key', '<', past ?? ''))
-    .execute();
+  const { rows } = await between(db, { cellar, now, begin, past: pastPrefix(begin) });
   return rows.toSorted((one, other) => (one.key < other.key ? -1 : 1));
 }
+
+const keep = readyQuery((db, row: Tables['kept']) =>
+  db
+    .insertInto('kept')
+    .values(row)
+    .onConflict((on) =>
+      on.columns(['cellar', 'key']).doUpdateSet((eb) => ({
+        text: eb.ref('excluded.text'),
+        until: eb.ref('excluded.until'),
+      })),
+    ),
+);
+
+const dropLapsed = readyQuery((db, { cellar, now }: OfCellar) =>
+  db.deleteFrom('kept').where('cellar', '=', cellar).where('until', '<=', now),
+);
+
+const drop = readyQuery((db, { cellar, key }: { readonly cellar: string; readonly key: string }) =>
+  db.deleteFrom('kept').where('cellar', '=', cellar).where('key', '=', key),
+);
 
 /** Keeps a text in place of what was there. What has lapsed goes with it. */
 export async function keepText(
@@ -56,21 +90,11 @@ export async function keepText(
   cellar: string,
   { key, text, until, now }: KeptText & { readonly now: number },
 ): Promise<void> {
-  await db
-    .insertInto('kept')
-    .values({ cellar, key, text, until: until ?? null })
-    .onConflict((on) =>
-      on.columns(['cellar', 'key']).doUpdateSet((eb) => ({
-        text: eb.ref('excluded.text'),
-        until: eb.ref('excluded.until'),
-      })),
-    )
-    .execute();
-  if (until === undefined) return;
-  await db.deleteFrom('kept').where('cellar', '=', cellar).where('until', '<=', now).execute();
+  await keep(db, { cellar, key, text, until: until ?? null });
+  if (until !== undefined) await dropLapsed(db, { cellar, now });
 }
 
 /** Drops what is kept under a key, where there is anything. */
 export async function dropText(db: Kysely<Tables>, cellar: string, key: string): Promise<void> {
-  await db.deleteFrom('kept').where('cellar', '=', cellar).where('key', '=', key).execute();
+  await drop(db, { cellar, key });
 }

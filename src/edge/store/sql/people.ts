@@ -1,9 +1,33 @@
 import type { Kysely } from 'kysely';
 import type { Person } from '../../../core/cellar/cellar-store.ts';
+import { readyQuery } from './ready-query.ts';
 import type { Tables } from './tables.ts';
 
 const toPerson = ({ number, name }: { number: number; name: string | null }): Person =>
   name === null ? { number } : { number, name };
+
+const ofCellar = (db: Kysely<Tables>, cellar: string) =>
+  db.selectFrom('person').select(['number', 'name']).where('cellar', '=', cellar);
+
+const ofId = readyQuery((db, { cellar, id }: { readonly cellar: string; readonly id: string }) =>
+  ofCellar(db, cellar).where('id', '=', id),
+);
+
+const all = readyQuery((db, { cellar }: { readonly cellar: string }) =>
+  ofCellar(db, cellar).orderBy('number'),
+);
+
+const keep = readyQuery((db, row: Tables['person']) =>
+  db
+    .insertInto('person')
+    .values(row)
+    .onConflict((on) =>
+      on.columns(['cellar', 'number']).doUpdateSet((eb) => ({
+        id: eb.ref('excluded.id'),
+        name: eb.ref('excluded.name'),
+      })),
+    ),
+);
 
 /** The person whom the platform knows by this id. */
 export async function readPerson(
@@ -11,15 +35,13 @@ export async function readPerson(
   cellar: string,
   id: string,
 ): Promise<Person | undefined> {
-  const query = db.selectFrom('person').select(['number', 'name']).where('cellar', '=', cellar);
-  const row = await query.where('id', '=', id).executeTakeFirst();
+  const [row] = (await ofId(db, { cellar, id })).rows;
   return row && toPerson(row);
 }
 
 /** All people of a cellar, by number. */
 export async function readPeople(db: Kysely<Tables>, cellar: string): Promise<readonly Person[]> {
-  const query = db.selectFrom('person').select(['number', 'name']).where('cellar', '=', cellar);
-  return (await query.orderBy('number').execute()).map(toPerson);
+  return (await all(db, { cellar })).rows.map(toPerson);
 }
 
 /**
@@ -35,14 +57,5 @@ export async function keepPerson(
   const known = id === null ? undefined : await readPerson(db, cellar, id);
   if (known !== undefined && known.number !== number)
     throw new RangeError(`person ${number} is number ${known.number} already`);
-  await db
-    .insertInto('person')
-    .values({ cellar, number, id, name: name ?? null })
-    .onConflict((on) =>
-      on.columns(['cellar', 'number']).doUpdateSet((eb) => ({
-        id: eb.ref('excluded.id'),
-        name: eb.ref('excluded.name'),
-      })),
-    )
-    .execute();
+  await keep(db, { cellar, number, id, name: name ?? null });
 }

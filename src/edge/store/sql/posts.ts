@@ -1,12 +1,24 @@
 import type { Kysely } from 'kysely';
 import type { Post } from '../../../core/cellar/mailbox.ts';
 import { inParts } from './in-parts.ts';
+import { readyQuery } from './ready-query.ts';
 import type { Tables } from './tables.ts';
+
+const keep = readyQuery((db, post: Post) =>
+  db
+    .insertInto('post')
+    .values(post)
+    .onConflict((on) => on.doNothing()),
+);
+
+const drop = readyQuery(
+  (db, { channel, ids }: { readonly channel: string; readonly ids: readonly string[] }) =>
+    db.deleteFrom('post').where('channel', '=', channel).where('id', 'in', ids),
+);
 
 /** Keeps something that is to be sent, behind all others; where it waits already nothing changes. */
 export async function keepPost(db: Kysely<Tables>, { id, channel, chat, body, at }: Post): Promise<void> {
-  const insert = db.insertInto('post').values({ id, channel, chat, body, at });
-  await insert.onConflict((on) => on.doNothing()).execute();
+  await keep(db, { id, channel, chat, body, at });
 }
 
 /** What is to be sent, in order. */
@@ -17,8 +29,7 @@ export function readPosts(db: Kysely<Tables>, channel: string): Promise<Post[]> 
 
 /** Forgets posts. */
 export async function dropPosts(db: Kysely<Tables>, channel: string, ids: readonly string[]): Promise<void> {
-  for (const part of inParts(ids))
-    await db.deleteFrom('post').where('channel', '=', channel).where('id', 'in', part).execute();
+  for (const part of inParts(ids)) await drop(db, { channel, ids: part });
 }
 
 /** Gives posts another chat. */

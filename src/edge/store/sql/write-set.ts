@@ -6,8 +6,16 @@ import { dropText, keepText } from './kept-texts.ts';
 import { markHandled } from './arrived-things.ts';
 import { keepPerson } from './people.ts';
 import { keepPost } from './posts.ts';
+import { readyQuery } from './ready-query.ts';
 import { createSqlLedger } from './sql-ledger.ts';
 import type { Tables } from './tables.ts';
+
+const begin = readyQuery((db, { cellar }: { readonly cellar: string }) =>
+  db
+    .insertInto('cellar')
+    .values({ cellar })
+    .onConflict((on) => on.doNothing()),
+);
 
 /** Writes what a turn writes; whoever calls it sees to it that all of it is kept or none. `now`: ms since 1970. */
 export async function writeSet(
@@ -15,11 +23,7 @@ export async function writeSet(
   writes: readonly Write[],
   { cellar, now }: { readonly cellar: string; readonly now: number },
 ): Promise<void> {
-  await db
-    .insertInto('cellar')
-    .values({ cellar })
-    .onConflict((on) => on.doNothing())
-    .execute();
+  await begin(db, { cellar });
   const entries = writes.flatMap((write) => (write.kind === 'entry' ? [write.entry] : []));
   await noteEntries(createSqlLedger(db, cellar), entries);
   for (const write of writes) {
