@@ -642,9 +642,7 @@ step-so2-by-titration = SO2, 32 000 × normality × titrant ÷ sample:
 step-ascorbic-counted = Ascorbic acid counts as, mg/L × 64.06 ÷ 176.12:
 step-so2-without-ascorbic = SO2 without it:
 step-spread-of-need = ± of what is needed, target × 10^(pH − pK) × ln 10 × ± of the pH:
-step-spread-of-free = ± of the free SO2:
 step-spread-of-dose = ± of the addition, root of both squared:
-step-spread-with-binding = ± with what binds:
 step-dose-lowest = Lowest, needed − free − its ±:
 step-dose-highest = Highest, needed − free + its ±:
 step-molecular-sure = Molecular one is sure of, after × (1 − root of both relative ± squared):
@@ -777,6 +775,7 @@ round-noted =
         [1] one addition
        *[other] { $count } additions
     }, { $list }, { $when }.
+round-noted-rest = the rest of the round
 round-noted-line = Noted { $entry }: { $vessel } { $list }, { $when }.
 round-noted-each = Noted { $entries }: { $vessel } { $list } each, { $when }.
 round-noted-before = Noted before, and left: { $list }.

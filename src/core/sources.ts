@@ -63,7 +63,40 @@ export const SOURCES = {
     title: 'agriculture press association of Campania, art. 29: aqueous SO2 in use 5 to 8 %',
     read: true,
   },
+  'food-additives-data-book': {
+    title: 'Food Additives Data Book, p. 780: potassium metabisulfite, solubility 25 %',
+    read: true,
+  },
+  'encyclopedia-page': {
+    title: 'an encyclopedia page: potassium metabisulfite, 450 g/L at 20 °C',
+    read: true,
+  },
+  'sodium-data-sheet': { title: 'a supplier data sheet: sodium metabisulfite, 470 g/L at 25 °C', read: true },
+  'us-24.246': { title: '27 CFR 24.246(a)(2), water used to dissolve additives (excerpt)', read: true },
   'icsc-sheets': { title: 'International Chemical Safety Cards 0074, 1134, 1175, 1254', read: true },
+  'titration-general': {
+    title:
+      'SO2 in mg/L = mL × normality × 32 000 ÷ mL of sample (Italian university slides; Grapevine Magazine, Jan/Feb 2022, p. 14)',
+    read: true,
+  },
+  'eec-2676-90-aeration': {
+    title: 'Regulation (EEC) No 2676/90, consolidated 13.08.2005, sulphur dioxide (OIV-MA-AS323-04A)',
+    read: true,
+  },
+  'oiv-as323-04a-repeatability': {
+    title: 'OIV-MA-AS323-04A, repeatability of total SO2',
+    read: false,
+  },
+  'oiv-as323-04b': { title: 'OIV-MA-AS323-04B, iodine titration', read: false },
+  'iodine-equivalents': {
+    title: 'one I2 takes up two electrons: N = 2 M (chemistry, no source needed)',
+    read: true,
+  },
+  'bottle-study-quebec': {
+    title: 'a Quebec wine site that reports a study: free SO2 left after three years in bottle',
+    read: true,
+  },
+  'awri-tn06': { title: 'AWRI Technical Note TN06, hydrogen peroxide', read: true },
   'gallon-definitions': { title: 'NIST Handbook 44; UK Weights and Measures Act', read: false },
 } as const satisfies Readonly<Record<string, Source>>;
 

@@ -54,12 +54,48 @@ export const STEP_KINDS = {
   'free-after': { symbol: 'F', formula: 'free SO2 now + SO2 that goes in' },
   'molecular-after': { symbol: 'M', formula: 'free SO2 after ÷ (10^(pH − pK) + 1)' },
   'salt-mass': { symbol: 'm', formula: 'salt in 100 mL ÷ 0.1 L × volume' },
+  'salt-by-recipe': { symbol: 'm', formula: 'salt in a litre × volume', source: 'common-practice' },
+  'citric-acid-by-recipe': {
+    symbol: 'k',
+    formula: 'citric acid in a litre × volume',
+    source: 'common-practice',
+  },
+  'added-by-one-mL': { symbol: 'A', formula: '1 mL × SO2 in the stock ÷ volume of the barrel' },
+  'stock-for-a-barrel': { symbol: 'v', formula: 'rise × volume of the barrel ÷ SO2 in the stock' },
   'solution-strength': { symbol: 'c', formula: 'SO2 that goes in ÷ volume of the solution × 0.1 L' },
   'solution-strength-by-salt': {
     symbol: 'c',
     formula: 'salt in the solution × share of SO2 in the salt',
     source: 'ciaaw-2021',
   },
+  'titrant-normality': { symbol: 'N', formula: '2 × molarity of the iodine', source: 'iodine-equivalents' },
+  'iodate-normality': {
+    symbol: 'N',
+    formula: '6 × iodate ÷ its molar mass ÷ volume of the flask',
+    source: 'iupac-conventional',
+  },
+  'titrant-used': { symbol: 'n', formula: 'titrant − blank' },
+  'so2-by-titration': {
+    symbol: 'C',
+    formula: '32 000 × normality × titrant ÷ sample',
+    source: 'titration-general',
+  },
+  'ascorbic-counted': {
+    symbol: 'C',
+    formula: 'ascorbic acid × molar mass of SO2 ÷ molar mass of ascorbic acid',
+    source: 'iupac-conventional',
+  },
+  'so2-without-ascorbic': { symbol: 'C', formula: 'titrated − what the ascorbic acid counts as' },
+  'spread-of-need': { symbol: '±', formula: 'target × 10^(pH − pK) × ln 10 × ± of the pH' },
+  'spread-of-dose': { symbol: '±', formula: 'root of the sum of both squared' },
+  'dose-lowest': { symbol: 'D', formula: 'SO2 that goes in − its ±' },
+  'dose-highest': { symbol: 'D', formula: 'SO2 that goes in + its ±' },
+  'molecular-sure': {
+    symbol: 'M',
+    formula: 'molecular SO2 after × (1 − root of the sum of both relative ± squared)',
+  },
+  'blend-free': { symbol: 'F', formula: '(free × volume + free × volume) ÷ both volumes' },
+  'blend-total': { symbol: 'T', formula: '(total × volume + total × volume) ÷ both volumes' },
 } as const satisfies Readonly<Record<string, StepKind>>;
 
 /** Which line of a working. */

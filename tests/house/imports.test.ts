@@ -5,7 +5,20 @@ import { parse, sourceFiles } from './source-file.ts';
 import type { SourceFile } from './source-file.ts';
 
 /** Inside `src/core` a room uses only rooms above it, so that a figure is never computed from what needs it. */
-const CORE_ROOMS = ['', 'units', 'chemistry', 'additives', 'binding', 'limits', 'dose', 'time', 'cellar'];
+const CORE_ROOMS = [
+  '',
+  'units',
+  'time',
+  'chemistry',
+  'additives',
+  'binding',
+  'limits',
+  'dose',
+  'laboratory',
+  'blend',
+  'forecast',
+  'cellar',
+];
 /** Reading knows nothing of answering, and wording nothing of what decides. */
 const CHAT_ROOMS = ['reader', 'replies', 'attachments', 'conversation'];
 /** Programs: they start things, so nobody imports them. */

@@ -607,19 +607,21 @@ export interface SentenceValues {
   'role-same': 'name' | 'role';
   'round-again': never;
   'round-all': 'all';
-  'round-amount': 'additive' | 'all' | 'amount' | 'red' | 'redAmount' | 'strength' | 'tablet' | 'unit';
+  'round-amount':
+    'additive' | 'all' | 'amount' | 'limited' | 'red' | 'redAmount' | 'strength' | 'tablet' | 'unit';
   'round-and-more': 'count';
   'round-choice': 'ph' | 'vessel';
   'round-dose':
-    'additive' | 'all' | 'amount' | 'list' | 'red' | 'redAmount' | 'strength' | 'tablet' | 'unit' | 'vessel';
+    'additive' | 'all' | 'amount' | 'limited' | 'list' | 'red' | 'redAmount' | 'strength' | 'tablet' | 'unit' | 'vessel';
   'round-dose-bare':
-    'additive' | 'all' | 'amount' | 'red' | 'redAmount' | 'strength' | 'tablet' | 'unit' | 'vessel';
+    'additive' | 'all' | 'amount' | 'limited' | 'red' | 'redAmount' | 'strength' | 'tablet' | 'unit' | 'vessel';
   'round-effect': never;
   'round-for-all': 'list';
   'round-gone': never;
   'round-head': 'additive' | 'kind' | 'size';
   'round-if-red': 'red' | 'redAmount';
   'round-kept': never;
+  'round-limited': 'limited';
   'round-low': 'list';
   'round-missing': 'field' | 'vessel';
   'round-more': 'count';
@@ -631,6 +633,7 @@ export interface SentenceValues {
   'round-noted-each': 'entries' | 'list' | 'vessel' | 'when';
   'round-noted-line': 'entry' | 'list' | 'vessel' | 'when';
   'round-noted-none': 'entries';
+  'round-noted-rest': never;
   'round-nothing': 'list' | 'vessel';
   'round-nothing-bare': 'vessel';
   'round-of': 'additive' | 'strength';
@@ -716,9 +719,7 @@ export interface SentenceValues {
   'step-solution-strength': never;
   'step-solution-strength-by-salt': never;
   'step-spread-of-dose': never;
-  'step-spread-of-free': never;
   'step-spread-of-need': never;
-  'step-spread-with-binding': never;
   'step-tablets-by-salt': never;
   'step-tablets-by-so2': never;
   'step-titrant-normality': never;
