@@ -115,6 +115,119 @@ dose-rate-bare = { at }{ $dose } SO2 to add
 dose-need = { at }at pH { $ph }, { $molecular } molecular takes { $free } free
 dose-now = { at }{ $molecular } molecular now (pH { $ph }, { $free } free)
 
+## The law
+
+law-of =
+    { $region ->
+        [oiv] international code
+        [eu] EU
+        [uk] UK
+        [us] US
+        [ca] Canada
+        [ca-qc] Quebec
+        [au] Australia
+        [nz] New Zealand
+        [za] South Africa
+        [ar] Argentina
+        [cl] Chile
+        [br] Brazil
+        [jp] Japan
+        [kr] Korea
+        [cn] China
+        [codex] Codex
+        [ch] Switzerland
+        [ge] Georgia
+        [hk] Hong Kong
+        [eaeu] Eurasian union
+        [uy] Uruguay
+        [in] India
+        [md] Moldova
+       *[mercosur] Mercosur
+    }
+law-decides =
+    { $region ->
+        [oiv] ; your country’s law decides
+       *[other] {""}
+    }
+rule-sugar =
+    { $band ->
+        [under] {" "}under { $high } g/L sugar
+        [to] {" "}up to { $high } g/L sugar
+        [from] {" "}from { $low } g/L sugar
+        [above] {" "}above { $low } g/L sugar
+        [between] {" "}from { $low } to { $high } g/L sugar
+       *[none] {""}
+    }
+rule-class =
+    { $class ->
+        [sweet-300] , designated sweet
+        [sweet-350] , designated sweet
+        [sweet-400] , designated sweet
+        [national-pdo] , PDO
+        [national-pdo-dry] , PDO dry
+        [national-pdo-other] , PDO not dry
+        [dry] , dry
+        [sweet] , sweet
+        [bulk-export] , bulk for export
+        [made-with-organic] , made with organic grapes
+       *[none] {""}
+    }
+rule-what =
+    { $organic ->
+        [yes] organic{" "}
+       *[no] {""}
+    }{ $what ->
+        [red] red
+        [pale] white or rosé
+        [white] white
+        [quality-sparkling] quality sparkling
+        [other-sparkling] other sparkling
+        [fortified] fortified
+        [cider] cider
+        [mead] mead
+        [fruit-wine] fruit wine
+        [alcohol-free] alcohol-free wine
+       *[wine] wine
+    }{ rule-sugar }{ rule-class }
+rule-short = { law-of }, { rule-what }
+dose-capped =
+    { $of ->
+        [free] { $list }, not more: free then up to { $after }, limit { $limit } { $unit } free ({ rule-short }).
+       *[total] { $list }, not more: total then { $least ->
+            [yes] at least{" "}
+           *[no] {""}
+        }{ $after }, limit { $limit } { $unit } ({ rule-short }).
+    }
+dose-at-limit =
+    { $of ->
+        [free] { at }no sulfite now, at the limit: free { $now }, limit { $limit } { $unit } free ({ rule-short }).
+       *[total] { at }no sulfite now, at the limit: total { $least ->
+            [yes] at least{" "}
+           *[no] {""}
+        }{ $now }, limit { $limit } { $unit } ({ rule-short }).
+    }
+dose-capped-kept =
+    { $reserve ->
+        [none] { $kept } { $unit } are kept below it, as a measured total may be so far off. What you aim at would pass it.
+       *[some] { $kept } { $unit } are kept below it: { $error } as a measured total may be so far off, { $reserve } for bottling. What you aim at would pass it.
+    }
+full-dose-asks =
+    { $of ->
+        [free] { at }free could be { $after }, over the limit of { $limit } { $unit } free ({ rule-short }). Give the figures all the same?
+       *[total] { at }total would be { $least ->
+            [yes] at least{" "}
+           *[no] {""}
+        }{ $after }, over the limit of { $limit } { $unit } ({ rule-short }). Give the figures all the same?
+    }
+full-dose-care = The wine may not be sold so under that law. The log keeps that it was known. Not legal advice: confirm for your market.
+full-dose-none = There is no dose above that would pass a limit.
+button-full-dose = Full dose
+button-all-the-same = Yes, all the same
+over-rule-noted = Kept with it: over the limit ({ rule-short }).
+total-sum = total { $total } ({ $measured } measured { $day } + { $since } added since)
+assumed-law = unknown is taken at its strictest for the law
+designation-asked = Sweet wine of a designation with a limit of its own ({ law-of })? I never infer it: say so, like: { $wine } designated 300
+
 ## The first line: a choice and not a dose
 
 choice-head = { at }a choice, not a dose: at pH { $ph }, { $target } molecular takes { $free } free.
@@ -214,10 +327,43 @@ measure-tomorrow = Measure free SO2 tomorrow, before adding again.
 reading-read = { at }{ $list }.
 solution-weigh = Weigh { $amount } { additive } and fill up with water to { $volume }.
 solution-measure = Measure { $amount } { additive } and fill up with water to { $volume }.
-solution-no-recipe = For a solution to store or to clean with I have no recipe yet. A stock I can do: make 5 L of 10% kmbs
 solution-from-powder = I make stocks from powder only: make { $volume } of 10% kmbs
 solution-strength = That stock holds { $strength } g SO2 in 100 mL.
-solution-fresh = Make it fresh and label it: it loses strength in days to weeks.
+solution-fresh = Make it fresh, write the date on it: its strength falls within days to weeks (common practice, no source).
+solution-per-barrel = In a { $barrel } barrel 1 mL brings { $adds } mg/L; { $rise } mg/L take { $amount }.
+solution-us-water = It is water too: in the US at most 1 % of the wine, all additions together (27 CFR 24.246).
+solution-too-much = No: { $wanted } g/L does not surely dissolve. Published for { additive } at { $celsius } °C: { $least ->
+        [none] { $most } g/L ({ $source }).
+       *[other] { $least } and { $most } g/L ({ $source }).
+    } Make it weaker.
+solution-strengths = I make stocks of 1 to 25 %. Published for potassium metabisulfite at 20 °C: 250 g/L (Food Additives Data Book, p. 780) and 450 g/L (an encyclopedia page).
+solution-too-cold = No: { $wanted } g/L in water of { $water } °C. Published is { $most } g/L at { $celsius } °C ({ $source }), and nothing for colder water. Warm the water, or make it weaker.
+solution-colder = No figure is published below { $celsius } °C: see that all of it has dissolved.
+solution-holding = Holding solution, { $volume }: { $acid } citric acid, { $amount } { additive }.
+solution-rinse = Rinse, { $volume }: { $acid } citric acid, { $amount } { additive }.
+solution-order = All the water first, then the acid, the sulfite last and little by little. Never powder on acid.
+solution-air = It gives off SO2: ventilate, keep your face away, also from the bunghole.
+solution-for-holding = For an empty, clean barrel, full to the bung; look after it every few weeks.
+solution-for-rinse = For clean equipment: wet all of it, let it act some minutes.
+solution-drain = Drain it as local rules allow. Rinse with water before wine goes in.
+solution-practice = { $salt } and { $acid } g/L: common practice, no source. Your own figure: { $use ->
+        [holding] holding solution { $litres } L 1% kmbs
+       *[rinse] rinse { $litres } L 1% kmbs
+    }
+solution-not-wine =
+    { $vessel ->
+        [none] Never into wine.
+       *[other] Never into wine: { $vessel } has to be empty. Nothing is noted for it.
+    }
+ask-solution-volume =
+    { $use ->
+        [rinse] How much rinse do you make? In litres, or with its unit: 20 L, 5 gal
+        [holding] How much holding solution? In litres, or with its unit: 225 L, 60 gal
+       *[stock] How much do you make? In litres, or with its unit: 5 L, 1 gal
+    }
+burning-sulfur-never = Burning sulfur (discs, wicks) is never a dose for wine: nobody knows how much of it goes in. No figure from me.
+burning-sulfur-danger = In empty barrels only, as the packet, local rules and trained people say. Never after spirits (fire), never unventilated, never unattended.
+burning-sulfur-rather = For an empty barrel rather: holding solution 225 L. For its wine send the reading: pH, free SO2, volume.
 
 ## What was read and what was assumed
 
@@ -467,6 +613,7 @@ caution-ventilate = Ventilate.
 caution-never-lean-in = Never lean into a tank.
 caution-gloves-goggles = Gloves, goggles.
 caution-no-acid-no-chlorine = Never with acid or chlorine cleaners.
+caution-no-other-acid-no-chlorine = No other acid, no chlorine cleaner.
 caution-asthma = Not for asthmatics.
 caution-crush-first = Crush, dissolve in a little wine or water.
 caution-dissolve-first = Dissolve first in a little wine or water.
@@ -615,6 +762,7 @@ step-addition = To add, free wanted − free now:
 step-dose-with-allowance = With the allowance, addition × (1 + allowance):
 step-dose-with-share = With the share that binds, addition ÷ (1 − share):
 step-volume-in-litres = Volume in litres:
+step-room-to-limit = Room, limit − what is kept below it − SO2 now:
 step-so2-mass = SO2 in grams, addition × volume ÷ 1000:
 step-so2-mass-each = SO2 for one vessel, addition × volume of one ÷ 1000:
 step-all-vessels = For all vessels, one × number:
@@ -633,6 +781,10 @@ step-mass-by-rate = Additive, rate × volume ÷ 1000:
 step-free-after = Free after, if nothing binds:
 step-molecular-after = Molecular after, free ÷ (10^(pH − pK) + 1):
 step-salt-mass = Salt, grams in 0.1 L ÷ 0.1 L × volume:
+step-added-by-one-mL = One mL in a barrel, SO2 in it ÷ volume of the barrel:
+step-stock-for-a-barrel = Stock for a barrel, rise × volume of the barrel ÷ SO2 in the stock:
+step-salt-by-recipe = Sulfite, grams in a litre × volume:
+step-citric-acid-by-recipe = Citric acid, grams in a litre × volume:
 step-solution-strength = Strength in 100 mL, SO2 ÷ volume × 0.1 L:
 step-solution-strength-by-salt = Strength as SO2, salt × share of SO2 in it:
 step-titrant-normality = Normality of the iodine, 2 × its molarity:
@@ -736,10 +888,7 @@ round-low = ⚠ Below 10 free much or all may bind: { $list }. There measure bef
 round-name = { $name }
 round-again = Send each line that could not be read again, whole.
 round-total =
-    In all { $list }: { $count ->
-        [2] the two amounts
-       *[other] the { $count } amounts
-    } as weighed, added up.
+    In all { $list }, the sum of the { $count } rounded amounts.
 round-total-of =
     { $kind ->
         [tablet] { $amount } effervescent tablets of { $size } g SO2
@@ -772,7 +921,7 @@ button-round-file = Sheet as a file
 button-round-undo = Undo { $entries }
 round-noted =
     Noted { $entries }: { $count ->
-        [1] one addition
+        [one] one addition
        *[other] { $count } additions
     }, { $list }, { $when }.
 round-noted-rest = the rest of the round
@@ -787,6 +936,28 @@ round-pick-noted = { $vessel }: noted, entry { $entry }.
 round-pick-none = All { $all } are noted.
 round-undone = Taken back: { $entries }. They stay in the log, crossed out.
 round-undone-none = Nothing of it is left to take back.
+sheet-vessel = Vessel
+sheet-volume = Volume L
+sheet-ph = pH
+sheet-free = Free SO2 mg/L
+sheet-total = Total SO2 mg/L
+sheet-dose = SO2 to add mg/L
+sheet-weigh = Weigh g
+sheet-measure = Measure mL
+sheet-tablets = Tablets
+sheet-additive = Additive
+sheet-strength = Strength %
+sheet-after = Free after, if nothing binds mg/L
+sheet-note = Note
+sheet-done = Done
+sheet-in-all = In all
+sheet-nothing = nothing to add
+sheet-limit = limit
+sheet-title = Weigh-out sheet
+sheet-open = No amount:
+sheet-caution = Gloves, goggles, ventilate. Never lean into a tank. Mix, measure tomorrow.
+sheet-fetch = In all { $list }
+sheet-additive-name = { additive }
 round-gone = No round is kept here: send it again.
 round-target-stage = { at }how many mg/L do you want to add?
 round-not-understood =

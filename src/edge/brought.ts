@@ -11,4 +11,6 @@ export interface BroughtFile {
 export interface Brought {
   readonly said: readonly Said[];
   readonly file?: BroughtFile;
+  /** The files after the first, where it is several pictures. */
+  readonly more?: readonly BroughtFile[];
 }

@@ -5,6 +5,7 @@ import type { Line } from '../chat/replies/reply.ts';
 import type { Said, Say } from '../chat/replies/say.ts';
 import type { Brought, BroughtFile } from './brought.ts';
 import { runPicture } from './run-picture.ts';
+import { runRoundSheet } from './run-round-sheet.ts';
 import type { Serve } from './serve-message.ts';
 
 /** What errands need. */
@@ -46,17 +47,23 @@ async function runErrand(errand: Errand, message: IncomingMessage, errands: Erra
       return runBackup(message, errands);
     case 'picture':
       return handedOver(await runPicture(errand, message, errands), message, errands);
+    case 'round-sheet':
+      return handedOver(await runRoundSheet(errand, message, errands.say), message, errands);
   }
 }
 
 /** What is brought, with the file put where the person finds it, where the chat itself carries none. */
 async function handedOver(
-  { said, file }: Brought,
+  brought: Brought,
   message: IncomingMessage,
   { handOver, say }: Errands,
 ): Promise<Brought> {
-  if (file === undefined || handOver === undefined) return { said, ...(file && { file }) };
-  return { said: [...said, saying('export-written', { path: await handOver(file) }, message, say)] };
+  const { said, file, more = [] } = brought;
+  if (file === undefined || handOver === undefined) return brought;
+  const written: Said[] = [];
+  for (const one of [file, ...more])
+    written.push(saying('export-written', { path: await handOver(one) }, message, say));
+  return { said: [...said, ...written] };
 }
 
 async function runExport(

@@ -24,6 +24,7 @@ export interface Served {
   readonly said: readonly Said[];
   readonly answers?: Handled['answers'];
   readonly understood?: Handled['understood'];
+  readonly round?: Handled['round'];
   /** Something with files that is still to be done. */
   readonly errand?: Errand;
   /** The message with the cellar that it was handled in: an errand is for that one. */
@@ -53,7 +54,7 @@ export function makeServeTurn(serving: Omit<Serving, 'report'>): ServeTurn {
     const { message, handle } = admitted ?? { message: incoming, handle: serving.handle };
     for (let pass = 1; pass <= MOST_PASSES; pass += 1) {
       const served = await store.turn(message.cellar, async (view) => {
-        const { writes, replies, answers, understood, errand, place, again } = await handle(
+        const { writes, replies, answers, understood, round, errand, place, again } = await handle(
           message,
           view,
           settings,
@@ -66,6 +67,7 @@ export function makeServeTurn(serving: Omit<Serving, 'report'>): ServeTurn {
           said: replies.map(say),
           ...(answers && { answers }),
           ...(understood && { understood }),
+          ...(round && { round }),
           ...(errand && { errand, message }),
         };
         return { writes: also === undefined ? writes : [...writes, ...also(result)], result };

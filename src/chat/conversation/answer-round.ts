@@ -3,6 +3,8 @@ import type { Reading, Understood } from '../reader/understood.ts';
 import type { Button, Line, Reply } from '../replies/reply.ts';
 import { answerReading } from './answer-reading.ts';
 import { buttonsFor } from './buttons.ts';
+import type { RoundSheet } from '../attachments/round/round-sheet.ts';
+import { roundBody } from './lines/round-body.ts';
 import { roundFoot, type SaidInRound } from './lines/round-foot.ts';
 import { roundHead } from './lines/round-head.ts';
 import { roundName } from './lines/round-names.ts';
@@ -15,6 +17,10 @@ import { notesOfReading } from './notes-of-reading.ts';
 import type { Turn } from './outcome.ts';
 import type { Handled } from './ports.ts';
 import { asNoted, prepare } from './prepare.ts';
+import { keepingRound } from './round/kept-round.ts';
+import { roundButtons } from './round/round-buttons.ts';
+import { roundData } from './round/round-data.ts';
+import { rowOf } from './round/row-of.ts';
 import { additiveOf } from './to-requests.ts';
 import { withShared } from './with-shared.ts';
 
@@ -42,18 +48,32 @@ export function answerRound(understood: Understood, here: Here): Handled {
     nextEntry += notes.length;
     return { reading: asNoted(reading, here), outcome, ref, notes, name: name ?? vesselText(reading) };
   });
-  const buttons = safetyButton(said, cautioned);
   const [first] = said;
   const head = first ? roundHead(additive, shared, mannerOf(first.reading, decimalMark, here)) : [];
   const foot = roundFoot(said, cautioned, decimalMark, here);
-  const replies = chunks(said, VESSELS_A_MESSAGE).map((chunk, at): Reply => {
-    const lines: Line[] = [...head, ...chunk.flatMap(({ outcome }) => warningsLast(outcome.inRound))];
-    return {
-      language: settings.language,
-      lines: at === 0 ? [...lines, ...foot] : lines,
-      buttons: at === 0 ? buttons : [],
-    };
-  });
+  const sheet = sheetOf(said, { head, foot, mark: decimalMark }, here);
+  const buttons = [
+    ...(sheet === undefined ? [] : roundButtons(sheet, here)),
+    ...safetyButton(said, cautioned),
+  ].map((button, at) => ({ ...button, mark: String(at + 1) }));
+  const { language } = settings;
+  const replies: Reply[] =
+    sheet === undefined
+      ? chunks(said, VESSELS_A_MESSAGE).map((chunk, at): Reply => {
+          const lines: Line[] = [...head, ...chunk.flatMap(({ outcome }) => warningsLast(outcome.inRound))];
+          return {
+            language,
+            lines: at === 0 ? [...lines, ...foot] : lines,
+            buttons: at === 0 ? buttons : [],
+          };
+        })
+      : [
+          {
+            language,
+            lines: [...roundBody(sheet, isCautioning(said)), ...otherLines(said), ...foot],
+            buttons,
+          },
+        ];
   const next = nextMemory(here, understood, said, { buttons });
   return {
     writes: [
@@ -62,6 +82,7 @@ export function answerRound(understood: Understood, here: Here): Handled {
         said.flatMap(({ notes }) => notes),
       ),
       ...said.flatMap(({ outcome }) => outcome.keeps ?? []),
+      ...(sheet === undefined ? [] : keepingRound(sheet, here)),
       ...remembering(here, said),
       ...keeping(here, next),
     ],
@@ -73,7 +94,33 @@ export function answerRound(understood: Understood, here: Here): Handled {
       ),
     },
     answers: said.map(({ outcome }) => outcome.answer),
+    ...(sheet !== undefined && { round: roundData(sheet) }),
   };
+}
+
+/** Whether the cautions of an additive are said in full. */
+function isCautioning(said: readonly SaidInRound[]): boolean {
+  return said.some(({ outcome }) => outcome.cautioned !== undefined);
+}
+
+/** What was said of lines that ask for no dose. */
+function otherLines(said: readonly SaidInRound[]): Line[] {
+  return said
+    .filter((one) => rowOf(one) === undefined)
+    .flatMap(({ outcome }) => warningsLast(outcome.inRound));
+}
+
+/** The weigh-out sheet of a round; undefined where no line of it asks for a dose. */
+function sheetOf(
+  said: readonly SaidInRound[],
+  shared: Pick<RoundSheet, 'head' | 'foot' | 'mark'>,
+  { message }: Here,
+): RoundSheet | undefined {
+  const rows = said.flatMap((one) => rowOf(one) ?? []);
+  const [first] = said;
+  if (first === undefined || rows.every(({ is }) => is === 'open')) return undefined;
+  const unit = said.some(({ reading }) => reading.concentrationUnit === 'ppm') ? 'ppm' : 'mg/L';
+  return { ref: first.ref, at: message.at, rows, unit, ...shared };
 }
 
 /** What a warning is about stands above it. */

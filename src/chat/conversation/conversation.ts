@@ -16,7 +16,7 @@ import { greeting } from './note.ts';
 import { notedBefore, rememberingNoted } from './noted-before.ts';
 import type { Content, IncomingMessage, Handled } from './ports.ts';
 import { handlePress } from './press.ts';
-import { alreadyNoted } from './press/log-buttons.ts';
+import { alreadyNoted } from './press/already-noted.ts';
 import { handleText } from './text.ts';
 import { line } from './lines/line.ts';
 import type { Settings } from './settings.ts';

@@ -29,9 +29,24 @@ export function readingKey(chat: string, ref: string): string {
   return `reading ${JSON.stringify([chat, ref])}`;
 }
 
-/** What a button under a reading notes, so that it is noted once however often it is pressed. */
-export function buttonKey(does: 'dose' | 'note' | 'order' | 'sampled', chat: string, ref: string): string {
-  return `${does} ${JSON.stringify([chat, ref])}`;
+/** A round as it was said, by the reading of its first line. */
+export function roundKey(chat: string, ref: string): string {
+  return `round ${JSON.stringify([chat, ref])}`;
+}
+
+/** Which round was said last in a chat. */
+export function lastRoundKey(chat: string): string {
+  return `last round ${chat}`;
+}
+
+/** What a button under a reading notes, for one of its vessels or for all, so that it is noted once however often it is pressed. */
+export function buttonKey(
+  does: 'dose' | 'note' | 'order' | 'sampled',
+  chat: string,
+  ref: string,
+  vessel?: string,
+): string {
+  return `${does} ${JSON.stringify(vessel === undefined ? [chat, ref] : [chat, ref, vessel])}`;
 }
 
 /** Who is about to dose a vessel. */

@@ -1,6 +1,8 @@
 import type { CellarView, Write } from '../../core/cellar/cellar-store.ts';
 import type { AddedAnswer, DoseAnswer, EffectAnswer, SolutionAnswer } from '../../core/dose/answer.ts';
 import type { ImportRead } from '../attachments/import-read.ts';
+import type { RoundSheet } from '../attachments/round/round-sheet.ts';
+import type { TotalToFetch } from '../../core/dose/totals-to-fetch.ts';
 import type { Language, Understood } from '../reader/understood.ts';
 import type { Reply } from '../replies/reply.ts';
 import type { Settings } from './settings.ts';
@@ -74,6 +76,12 @@ export interface PlaceChange {
 /** What core answers to one reading. */
 export type Answer = DoseAnswer | EffectAnswer | AddedAnswer | SolutionAnswer;
 
+/** What a round takes of each additive, and how many of its lines have no amount because something is wrong, missing or to be chosen. */
+export interface RoundData {
+  readonly totals: readonly TotalToFetch[];
+  readonly problems: number;
+}
+
 /** Something with files that the edge does once the message's writes are durable. Times in milliseconds since 1970. */
 export type Errand =
   | {
@@ -90,6 +98,13 @@ export type Errand =
     }
   | { readonly kind: 'import'; readonly file: string; readonly language: Language }
   | { readonly kind: 'backup'; readonly language: Language }
+  | {
+      readonly kind: 'round-sheet';
+      readonly sheet: RoundSheet;
+      readonly format: 'csv' | 'xlsx' | 'picture';
+      readonly zone: string;
+      readonly language: Language;
+    }
   | {
       readonly kind: 'picture';
       readonly vessel: string;
@@ -110,6 +125,8 @@ export interface Handled {
   readonly understood?: Understood;
   /** One element a reading; `null` where nothing may be said. */
   readonly answers?: readonly (Answer | null)[];
+  /** What a round takes in all, beside its answers. */
+  readonly round?: RoundData;
   readonly errand?: Errand;
   readonly place?: PlaceChange;
   /** What is written has to be kept before the message can be read: it is to be handled once more then. */

@@ -22,6 +22,8 @@ import { claimDose, noteDose, noteWorkedOut, orderDose } from './press/log-butto
 import { answerSampled } from './press/sampled.ts';
 import { moreLines, safetyLines, workingOf } from './press/shown-again.ts';
 import { asSaid } from './recall.ts';
+import { pressRound } from './round/press-round.ts';
+import { parseRoundKey } from './round/round-key.ts';
 import type { Settings } from './settings.ts';
 import { vesselsIn } from './vessels-named.ts';
 import { choicesFor, letterAt, mayWaitFor, waitsFor } from './waiting.ts';
@@ -32,6 +34,8 @@ export async function handlePress(key: string, here: Here, view: CellarView): Pr
   const { settings, message } = here;
   const ofEntry = parseEntryKey(key);
   if (ofEntry) return pressEntry(ofEntry, here, view);
+  const ofRound = parseRoundKey(key);
+  if (ofRound) return pressRound(ofRound, here, view);
   const button = parseKey(key);
   if (button?.does === 'i') return takeImport(button.ref, here, view);
   const kept = button && (await view.kept(readingKey(message.chat, button.ref)));

@@ -15,6 +15,7 @@ import { keepManner } from './keep-manner.ts';
 import type { Memory, Waiting } from './memory.ts';
 import type { Handled } from './ports.ts';
 import { handlePress } from './press.ts';
+import { parseRoundKey } from './round/round-key.ts';
 import type { Settings } from './settings.ts';
 import { strengthAnswer } from './strength-answer.ts';
 import { vesselsNamed } from './vessels-named.ts';
@@ -65,7 +66,10 @@ function followsChoice({ lastButtons, lastWasChosen }: Memory): boolean {
 function addedAsPlanned({ fields, command }: Reading, here: Here): string | undefined {
   const { vessel } = fields;
   if (command?.name !== 'added-it') return undefined;
-  if (vessel === undefined) return here.memory.lastButtons.find((key) => parseKey(key)?.does === 'a');
+  if (vessel === undefined)
+    return here.memory.lastButtons.find(
+      (key) => parseKey(key)?.does === 'a' || parseRoundKey(key)?.does === 'ra',
+    );
   const plan = here.plans.get(vessel);
   return plan?.chat === here.message.chat ? `a:${plan.ref}` : undefined;
 }

@@ -8,13 +8,14 @@ import type { Plan } from './plan.ts';
 import { additiveOf } from './to-requests.ts';
 
 /**
- * What a dose has somebody weigh, measure or count, for all vessels of the reading, as the log would note it: with the
- * rounding of the instrument, and its own mg/L. Undefined where the dose has no one amount: a choice, or tablets with
- * the rest as a stock.
+ * What a dose has somebody weigh, measure or count, for all vessels of the reading or for each of them, as the log would
+ * note it: with the rounding of the instrument, and its own mg/L. Undefined where the dose has no one amount: a choice, or
+ * tablets with the rest as a stock.
  */
 export function toBeWeighed(
   reading: Reading,
   answer: DoseAnswer,
+  share: 'all' | 'each' = 'all',
 ): Omit<Plan, 'ref' | 'chat' | 'at'> | undefined {
   const additive = additiveOf(reading);
   const each = answer.per_vessel;
@@ -27,8 +28,11 @@ export function toBeWeighed(
     measure === undefined && stock
       ? { id: stock.additive, strength_percent: stock.strength_percent }
       : additive;
-  const amount = amountOf(each ? sumOf(shown, each.count) : shown, used);
-  const volume_L = reading.fields.volume_L ?? reading.assumed.volume_L;
+  const count = each?.count ?? 1;
+  const parts = share === 'each' ? count : 1;
+  const amount = amountOf(sumOf(shown, count / parts), used);
+  const all_L = reading.fields.volume_L ?? reading.assumed.volume_L;
+  const volume_L = all_L === undefined ? undefined : all_L / parts;
   const { SO2_g, added_mg_L } = added({
     ...amount,
     additive: used,

@@ -1,5 +1,7 @@
 import type { AdditiveId } from '../../core/additives/additive-id.ts';
+import type { StockEvent } from '../../core/cellar/entry.ts';
 import type { SaidDay, SaidWhen as SaidMoment } from '../../core/time/said-when.ts';
+import type { Region } from '../../core/limits/region.ts';
 import type { Basis } from '../../core/wine.ts';
 
 /** A moment as it was said, with the person's own words. */
@@ -23,6 +25,7 @@ export type Setting =
   | { readonly of: 'zone'; readonly zone: string }
   | { readonly of: 'allowance'; readonly percent: number }
   | { readonly of: 'basis'; readonly basis: Basis }
+  | { readonly of: 'law'; readonly region: Region }
   | { readonly of: 'short-replies'; readonly on: boolean }
   | { readonly of: 'ph-days'; readonly days: number }
   | { readonly of: 'check-days'; readonly of_what: 'usual' | 'often'; readonly days: number };
@@ -77,6 +80,19 @@ export type Command =
   | { readonly name: 'emptied' }
   | { readonly name: 'lot'; readonly lot: string }
   | { readonly name: 'picture' } // picture T4
+  /** The sheet of the last round: in messages, as a file, or as pictures. */
+  | { readonly name: 'round-sheet'; readonly form: 'text' | 'csv' | 'xlsx' | 'picture' }
+  /** limit T4, limit red RS 3 EU: the wine stands in the fields. */
+  | { readonly name: 'limit'; readonly region?: Region }
+  | { readonly name: 'full-dose' } // the dose that passes the limit, all the same
+  | { readonly name: 'stock' } // stock; stock kmbs
+  /** What came in, went out otherwise than into wine, or was counted: how much of which stands in the fields. */
+  | {
+      readonly name: 'stock-note';
+      readonly event: StockEvent;
+      readonly supplier?: string;
+      readonly purpose?: string;
+    }
   | { readonly name: 'added-it' } // what was reckoned last, or for the vessel named, went in
   | { readonly name: 'invite'; readonly role?: SaidRole }
   | { readonly name: 'join'; readonly code: string }

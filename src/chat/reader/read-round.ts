@@ -51,6 +51,7 @@ function headingOf({ when, command }: Draft, board: Board): Heading {
 const ALONE: ReadonlySet<Command['name']> = new Set<Command['name']>([
   'added-it',
   'picture',
+  'round-sheet',
   'invite',
   'join',
   'people',

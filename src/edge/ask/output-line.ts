@@ -44,13 +44,14 @@ function asReply(said: Served['said']): object {
 }
 
 /** One answer as the line that a program reads: what was understood, the figures, the text, the buttons. */
-export function toOutputLine(id: string | number | null, { said, understood, answers }: Served): object {
+export function toOutputLine(id: string | number | null, { said, understood, answers, round }: Served): object {
   const { readings = [], shared = {} } = understood ?? {};
   return {
     id,
     understood: readings.map((reading) => asUnderstood(reading, shared)),
     shared,
     answers: answers ?? [],
+    ...(round && { round }),
     ...asReply(said),
   };
 }

@@ -4,12 +4,10 @@ import type { ChartWords } from '../../chat/attachments/chart/chart-words.ts';
 import { renderPng } from './render-png.ts';
 
 /** What the thread that draws is given. */
-export interface GivenPicture {
-  readonly data: ChartData;
-  readonly words: ChartWords;
-}
+export type GivenPicture =
+  { readonly data: ChartData; readonly words: ChartWords } | { readonly svg: string };
 
 /** The work of that thread. */
-export function drawGiven({ data, words }: GivenPicture): Uint8Array {
-  return renderPng(chartSvg(data, words));
+export function drawGiven(given: GivenPicture): Uint8Array {
+  return renderPng('svg' in given ? given.svg : chartSvg(given.data, given.words));
 }

@@ -17,7 +17,8 @@ export interface PictureRequest {
   readonly manner: ChartManner;
 }
 
-const drawPicture = makeDrawPicture();
+/** What draws all pictures of this process, one at a time. */
+export const drawPicture = makeDrawPicture();
 
 /** Makes the picture of a vessel as PNG. Throws a `PictureFault` when the machine cannot. */
 export async function makePicture({ data, manner }: PictureRequest, say: Say): Promise<PictureFile> {

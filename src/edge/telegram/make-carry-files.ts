@@ -35,7 +35,11 @@ export interface CarryOptions {
 }
 
 /** What is shown while an errand is done. */
-const DOING: Readonly<Record<string, Doing>> = { picture: 'upload_photo', export: 'upload_document' };
+const DOING: Readonly<Record<string, Doing>> = {
+  picture: 'upload_photo',
+  'round-sheet': 'upload_document',
+  export: 'upload_document',
+};
 
 /** Makes the carrying of files. */
 export function makeCarryFiles(options: CarryOptions): CarryFiles {
@@ -70,7 +74,7 @@ export function makeCarryFiles(options: CarryOptions): CarryFiles {
       if (work === undefined) return [failed(message)];
       const doing = DOING[errand.kind] ?? 'typing';
       const running = (async (): Promise<readonly Said[]> => {
-        const { said, file } = await work.runErrand(errand, message);
+        const { said, file, more = [] } = await work.runErrand(errand, message);
         if (file === undefined) return said;
         const [first] = said;
         const isBeside =
@@ -78,6 +82,8 @@ export function makeCarryFiles(options: CarryOptions): CarryFiles {
         const caption = isBeside && first !== undefined ? { caption: first.text } : {};
         const isSent = await sendFile({ file, spot: arrival, ...caption }, sending);
         if (!isSent) return [failed(message)];
+        for (const one of more)
+          if (!(await sendFile({ file: one, spot: arrival }, sending))) return [failed(message)];
         return isBeside ? [] : said;
       })();
       return whileTyping({ ...arrival, doing }, running, sending);

@@ -8,6 +8,8 @@ import type { Manner } from '../manner.ts';
 import { redFigures, redValues } from './condition.ts';
 import { factsOf } from './facts.ts';
 import { line, part } from './line.ts';
+import { sumOf } from './measured.ts';
+import { shownDose } from './shown-dose.ts';
 
 type Part = Omit<Line, 'room'>;
 
@@ -19,7 +21,7 @@ export function roundDoseLine(
   additive: AdditiveAtHand | undefined,
   manner: Manner,
 ): Line[] {
-  const { measure, stock, per_vessel: each } = answer;
+  const { measure, stock, per_vessel: each, isLimited } = shownDose(answer);
   const shown = each?.measure ?? (each ? undefined : measure);
   const asStock = shown === undefined ? (each?.stock ?? stock) : undefined;
   const amount = shown ?? asStock?.measure;
@@ -32,7 +34,8 @@ export function roundDoseLine(
     additive: asStock?.additive ?? additive?.id ?? 'none',
     strength: strength === undefined ? 'none' : numberText(strength, 2, manner.mark),
     tablet: asStock === undefined ? 'fits' : 'too-large',
-    all: each && measure && shown ? measureText(measure, manner.mark) : 'none',
+    all: each && amount ? measureText(sumOf(amount, each.count), manner.mark) : 'none',
+    limited: isLimited ? 'limited' : 'none',
     ...redOf(answer, manner),
   };
   return withReadBack('round-dose', values, own, manner);

@@ -1,13 +1,12 @@
-import { dose } from '../../../core/dose/dose.ts';
 import type { Target } from '../../../core/wine.ts';
 import type { Reading } from '../../reader/understood.ts';
 import type { Line } from '../../replies/reply.ts';
+import { doseOf } from '../dose-of.ts';
 import type { Here } from '../here.ts';
 import { limitText } from '../lines/choice.ts';
 import { line } from '../lines/line.ts';
 import { vesselText } from '../lines/vessel.ts';
 import { mannerOf, molecularPerLitre } from '../manner.ts';
-import { toDoseRequest } from '../to-requests.ts';
 
 /** What was chosen: a target to reckon with, or lines where nothing is reckoned; undefined for no such choice. */
 export function chosen(
@@ -15,7 +14,8 @@ export function chosen(
   place: number,
   here: Here,
 ): { readonly target: Target } | { readonly lines: Line[] } | undefined {
-  const choice = dose(toDoseRequest(reading, here.settings)).choices?.[place];
+  const answer = doseOf(reading, here.settings);
+  const choice = answer.choices?.[place];
   if (choice === undefined) return undefined;
   const manner = mannerOf(reading, here.memory.decimalMark ?? '.', here);
   const vessel = vesselText(reading);
@@ -24,6 +24,6 @@ export function chosen(
     return { lines: [line('first', 'choice-left', { vessel, molecular }), line('first', 'ways-out')] };
   }
   if (choice.over_limit)
-    return { lines: [line('first', 'choice-over', { vessel, limit: limitText(reading, manner) })] };
+    return { lines: [line('first', 'choice-over', { vessel, limit: limitText(answer, manner) })] };
   return { target: choice.target };
 }

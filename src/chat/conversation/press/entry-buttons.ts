@@ -11,7 +11,8 @@ import { line } from '../lines/line.ts';
 import type { Handled } from '../ports.ts';
 import { replying } from '../replying.ts';
 import { tellingOf } from '../telling.ts';
-import { notedBy, noteOnce } from './log-buttons.ts';
+import { noteOnce } from './log-buttons.ts';
+import { notedBy } from './noted-by.ts';
 
 /** A button of an entry of the log: undo it, carry out the order, be asked a day after the addition. */
 export async function pressEntry(

@@ -1,12 +1,12 @@
 import type { CellarView } from '../../../core/cellar/cellar-store.ts';
-import type { Addition, LoggedEntry, Order } from '../../../core/cellar/entry.ts';
+import type { Addition, Order } from '../../../core/cellar/entry.ts';
 import { added } from '../../../core/dose/added.ts';
-import { dose } from '../../../core/dose/dose.ts';
 import { emptyReading } from '../../reader/empty-reading.ts';
 import type { Reading } from '../../reader/understood.ts';
 import { momentText } from '../../replies/moment-text.ts';
 import { vesselNames } from '../../replies/vessel-name.ts';
 import { additionOf } from '../addition-of.ts';
+import { doseOf } from '../dose-of.ts';
 import type { Here } from '../here.ts';
 import { notedAddition, type AdditionNote } from '../intents/noted-addition.ts';
 import { notedOrder } from '../intents/noted-order.ts';
@@ -15,19 +15,23 @@ import { line } from '../lines/line.ts';
 import { mannerOf } from '../manner.ts';
 import type { Remembered } from '../memory.ts';
 import { noting } from '../note.ts';
+import { alreadyNoted } from './already-noted.ts';
+import { noteEach } from './note-tapped.ts';
+import { notedBy } from './noted-by.ts';
 import type { Outcome } from '../outcome.ts';
-import { nameText, whoText } from '../people.ts';
+import { nameText } from '../people.ts';
 import { CLAIM_ms, type Claim } from '../plan.ts';
 import type { Handled } from '../ports.ts';
 import { replying } from '../replying.ts';
 import { tellingOf } from '../telling.ts';
 import { toBeWeighed } from '../to-be-weighed.ts';
-import { toAddedRequest, toDoseRequest } from '../to-requests.ts';
+import { toAddedRequest } from '../to-requests.ts';
 import { vesselsIn } from '../vessels-named.ts';
 import { whenOf } from '../when.ts';
 
-/** "I added it" under a dose: one entry, however often and by however many it is pressed. */
+/** "I added it" under a dose: one entry for each vessel, however often and by however many it is pressed. */
 export async function noteDose(found: Remembered, here: Here, view: CellarView): Promise<Handled> {
+  if (vesselsIn(found.reading.fields).length > 1) return noteEach(found, here, view);
   const addition = doseAsAddition(found, here);
   if (addition === undefined) return replying(here, { lines: [line('first', 'old-button')] });
   return noteOnce(
@@ -60,18 +64,6 @@ export async function noteOnce(
   return noted(notedAddition(keyed, { here, manner }), here);
 }
 
-/** What a button has noted that still holds, and the key of what it notes next: what was taken back may be noted anew. */
-export async function notedBy(
-  key: string,
-  view: CellarView,
-): Promise<{ readonly standing: LoggedEntry | undefined; readonly next: string }> {
-  const before = (await view.entriesOfKeys(key)).filter(
-    (one) => one.key === key || one.key.startsWith(`${key} `),
-  );
-  const standing = before.find(({ struck }) => struck === undefined);
-  return { standing, next: before.length === 0 ? key : `${key} ${before.length}` };
-}
-
 const NO_READING: Reading = emptyReading('added');
 
 function noted({ lines, buttons, notes = [], keeps = [] }: Outcome, here: Here): Handled {
@@ -79,22 +71,11 @@ function noted({ lines, buttons, notes = [], keeps = [] }: Outcome, here: Here):
   return { ...said, writes: [...noting(here, notes), ...keeps, ...writes] };
 }
 
-/** What is said where a button was pressed before. */
-export function alreadyNoted(entry: LoggedEntry, here: Here): Handled {
-  const values = {
-    entry: String(entry.entry),
-    vessel: vesselNames(entry.vessels),
-    when: momentText(entry.noted_at, tellingOf(here)),
-    who: whoText(entry.by, here),
-  };
-  return replying(here, { lines: [line('first', 'already-noted', values)] });
-}
-
 /** The dose of a reading as an addition; reckoned again, which always comes out alike. */
 function doseAsAddition({ reading }: Remembered, here: Here): Addition | undefined {
   const vessels = vesselsIn(reading.fields);
   if (vessels.length === 0 || reading.intent !== 'dose') return undefined;
-  const weighed = toBeWeighed(reading, dose(toDoseRequest(reading, here.settings)));
+  const weighed = toBeWeighed(reading, doseOf(reading, here.settings));
   if (weighed === undefined) return undefined;
   const [order] = vessels.length === 1 ? (here.vessels.get(vessels[0] ?? '')?.orders ?? []) : [];
   return {

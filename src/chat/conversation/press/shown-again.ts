@@ -1,5 +1,4 @@
 import { added } from '../../../core/dose/added.ts';
-import { dose } from '../../../core/dose/dose.ts';
 import { effect } from '../../../core/dose/effect.ts';
 import { solution } from '../../../core/dose/solution.ts';
 import type { Warning } from '../../../core/dose/answer.ts';
@@ -13,19 +12,14 @@ import { line } from '../lines/line.ts';
 import { vesselText } from '../lines/vessel.ts';
 import { allWarningLines } from '../lines/warnings.ts';
 import { wholeWorking } from '../lines/working.ts';
+import { doseOf } from '../dose-of.ts';
 import type { Here } from '../here.ts';
 import { mannerOf } from '../manner.ts';
 import type { Remembered } from '../memory.ts';
 import type { Settings } from '../settings.ts';
 import { toBeWeighed } from '../to-be-weighed.ts';
 import { vesselsIn } from '../vessels-named.ts';
-import {
-  additiveOf,
-  toAddedRequest,
-  toDoseRequest,
-  toEffectRequest,
-  toSolutionRequest,
-} from '../to-requests.ts';
+import { additiveOf, toAddedRequest, toEffectRequest, toSolutionRequest } from '../to-requests.ts';
 
 interface Reckoned {
   readonly steps: readonly Step[];
@@ -36,7 +30,7 @@ interface Reckoned {
 function reckonAgain(reading: Reading, settings: Settings): Reckoned {
   switch (reading.intent) {
     case 'effect':
-      return effect(toEffectRequest(reading, settings.basis));
+      return effect(toEffectRequest(reading, settings));
     case 'added':
       return { ...added(toAddedRequest(reading)), warnings: [] };
     case 'solution': {
@@ -44,7 +38,7 @@ function reckonAgain(reading: Reading, settings: Settings): Reckoned {
       return request ? { ...solution(request), warnings: [] } : { steps: [], warnings: [] };
     }
     case 'dose':
-      return dose(toDoseRequest(reading, settings));
+      return doseOf(reading, settings);
     case 'reading':
     case 'titration':
     case 'command':

@@ -13,6 +13,9 @@ interface Form {
   readonly isAct?: true;
 }
 
+/** Words beside the one that says in which form somebody wants the sheet of a round. */
+const SHEET: readonly OwnWordId[] = ['show', 'round', 'weigh-sheet', 'last', 'of', 'for', 'article'];
+
 const FORMS: readonly Form[] = [
   {
     command: { name: 'vessel' },
@@ -45,8 +48,16 @@ const FORMS: readonly Form[] = [
   { command: { name: 'forget' }, needs: ['forget'], ofVessel: true, isAct: true },
   { command: { name: 'picture' }, needs: ['picture'], may: ['show', 'of', 'for'], ofVessel: true },
   { command: { name: 'picture' }, needs: ['picture'], may: ['show'] },
+  { command: { name: 'round-sheet', form: 'text' }, needs: ['round'], may: ['show', 'all', 'last'] },
+  { command: { name: 'round-sheet', form: 'csv' }, needs: ['round', 'csv'], may: SHEET },
+  { command: { name: 'round-sheet', form: 'csv' }, needs: ['weigh-sheet', 'csv'], may: SHEET },
+  { command: { name: 'round-sheet', form: 'xlsx' }, needs: ['round', 'xlsx'], may: SHEET },
+  { command: { name: 'round-sheet', form: 'xlsx' }, needs: ['weigh-sheet', 'xlsx'], may: SHEET },
+  { command: { name: 'round-sheet', form: 'picture' }, needs: ['round', 'picture'], may: SHEET },
+  { command: { name: 'round-sheet', form: 'picture' }, needs: ['weigh-sheet', 'picture'], may: SHEET },
   { command: { name: 'added-it' }, needs: ['added-it'], may: ['done'], isAct: true },
   { command: { name: 'added-it' }, needs: ['done'], isAct: true },
+  { command: { name: 'full-dose' }, needs: ['full-dose'], may: ['yes', 'show', 'of', 'for'], ofVessel: false },
   { command: { name: 'people' }, needs: ['people'], may: ['show', 'all'] },
   { command: { name: 'read-along', on: true }, needs: ['read-along'], isAct: true },
   { command: { name: 'read-along', on: false }, needs: ['only-called'], isAct: true },

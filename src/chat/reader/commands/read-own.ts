@@ -10,12 +10,14 @@ import { readDay } from './day.ts';
 import { readExport } from './export.ts';
 import { readImport } from './import.ts';
 import { readJoin } from './join.ts';
+import { readLimit } from './limit.ts';
 import { readLater } from './later.ts';
 import { readOrder } from './order.ts';
 import { readPersonWord } from './person-word.ts';
 import { readPlain } from './plain.ts';
 import { readSetting } from './settings.ts';
 import { readStatement } from './statement.ts';
+import { readStock } from './stock.ts';
 import { readStrike } from './strike.ts';
 import type { Talk } from './talk.ts';
 import { talkOf } from './talk.ts';
@@ -40,8 +42,8 @@ const OPENERS: ReadonlySet<OwnWordId> = new Set([
   'order', 'orders', 'open', 'due', 'later', 'remind', 'not', 'unwatch', 'watch', 'settings', 'export', 'import', 'backup', 'forget',
   'forget-me', 'units', 'work-in', 'metric', 'us', 'imperial', 'usual', 'usual-bare', 'reds', 'whites', 'sweets', 'target', 'quiet', 'daily',
   'zone', 'we-are-in', 'allowance', 'basis', 'replies', 'counts', 'every',
-  'picture', 'added-it', 'done', 'invite', 'keeper', 'hand', 'guest', 'people', 'remove', 'join', 'at-cellar', 'cellars', 'cellar-is', 'name-cellar',
-  'read-along', 'only-called',
+  'picture', 'round', 'added-it', 'done', 'invite', 'keeper', 'hand', 'guest', 'people', 'remove', 'join', 'at-cellar', 'cellars', 'cellar-is', 'name-cellar',
+  'read-along', 'only-called', 'law', 'limit', 'full-dose', 'yes',
 ]); // prettier-ignore
 
 /** Whether a message could be talk to the bot at all: one of its own words opens it, it is a day, or asks for a vessel. */
@@ -63,7 +65,7 @@ function commandOf(board: Board, talk: Talk): Draft | undefined {
     if (LONG.includes(read)) return { ...emptyReading('command'), command };
     return { ...draftOfBoard(talk.board, 'command'), command };
   }
-  return readOrder(talk);
+  return readOrder(talk) ?? readLimit(talk);
 }
 
 /**

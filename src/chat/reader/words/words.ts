@@ -1,4 +1,5 @@
 import type { AdditiveId } from '../../../core/additives/additive-id.ts';
+import type { Region } from '../../../core/limits/region.ts';
 import type { Category, Product, Stage, Style } from '../../../core/wine.ts';
 import type { Language } from '../understood.ts';
 
@@ -28,7 +29,7 @@ export type CueId =
   | 'fruit' | 'wine' | 'verb' | 'pronoun' | 'month' | 'lot' | 'variety'
   | 'greeting' | 'thanks' | 'help' | 'cellar' | 'plain' | 'potassium' | 'sodium' | 'yet'
   | 'percent' | 'please' | 'in-store' | 'into' | 'clock-before' | 'no' | 'states' | 'plus' | 'times' | 'wick'
-  | 'should' | 'fullness' | 'share-word' | 'limit' | 'sample-word' | 'past-time' | 'put' | 'lately' | 'bag' | 'buy' | 'in-water-name' | 'solution-name' | 'per-barrel' | 'rises-too' | 'tap-too'
+  | 'should' | 'fullness' | 'share-word' | 'limit' | 'sample-word' | 'past-time' | 'put' | 'lately' | 'bag' | 'buy' | 'in-water-name' | 'solution-name' | 'per-barrel' | 'rises-too' | 'tap-too' | 'from-too' | 'add-behind' | 'past-if-accented' | 'only-done' | 'one' | 'many'
   | 'designated' | 'declared-year' | 'density' | 'density-unit' | 'undeclared-year' | 'quality' | 'other-sparkling' | 'pdo' | 'bulk' | 'keep' | 'bottling' | 'bottling-reserve'; // prettier-ignore
 
 /** What a word is. */
@@ -52,6 +53,9 @@ export type Tag =
  * `says`, so that none of them changes how a reading is read.
  */
 export type OwnWordId =
+  /** A market whose law may be meant. */
+  | `law:${Region}`
+  | 'law' | 'limit' | 'full-dose' | 'yes'
   | 'filler' | 'request' | 'courtesy' | 'article' | 'if' | 'ask' | 'show' | 'vessels' | 'today' | 'yesterday' | 'before-yesterday' | 'sheet' | 'what-was-added'
   | 'history' | 'history-word' | 'undo' | 'strike' | 'entry' | 'because' | 'order' | 'orders' | 'open' | 'still' | 'due' | 'later' | 'tomorrow' | 'next-week'
   | 'remind' | 'again' | 'not' | 'unwatch' | 'watch' | 'settings' | 'export' | 'import' | 'backup' | 'forget'
@@ -65,8 +69,9 @@ export type OwnWordId =
   | 'to' | 'from' | 'with' | 'of' | 'off-lees' | 'finished' | 'two-meanings' | 'ml-way' | 'lot' | 'number' | 'remark' | 'remark-bare' | 'bottled'
   | 'sampled' | 'at' | 'on' | 'until' | 'moment-bar' | 'this-morning' | 'last-night' | 'part-of-day' | 'ago' | 'am'
   | 'pm' | 'oclock' | 'noon' | 'hour' | 'minute' | 'day' | 'week' | 'ordinal'
-  | 'picture' | 'added-it' | 'done' | 'invite' | 'keeper' | 'hand' | 'guest' | 'as-role' | 'people' | 'remove' | 'make-role' | 'join' | 'at-cellar' | 'cellars'
+  | 'picture' | 'round' | 'weigh-sheet' | 'added-it' | 'done' | 'invite' | 'keeper' | 'hand' | 'guest' | 'as-role' | 'people' | 'remove' | 'make-role' | 'join' | 'at-cellar' | 'cellars'
   | 'cellar-is' | 'name-cellar' | 'read-along' | 'only-called'
+  | 'stock' | 'in-store' | 'how-much' | 'received' | 'used-up' | 'discarded' | 'counted' | 'supplier' | 'for-equipment'
   | 'count-half' | 'count-1' | 'count-2' | 'count-3' | 'count-4' | 'count-5' | 'count-6'; // prettier-ignore
 
 /** The plain questions about the trade that people ask again and again. */

@@ -12,7 +12,7 @@ import { replying } from '../../replying.ts';
 import { tellingOf } from '../../telling.ts';
 
 /** So long one takes back one's own last entry without a reason, in milliseconds. */
-const UNDO_ms = 15 * MINUTE_ms;
+export const UNDO_ms = 15 * MINUTE_ms;
 
 /** Takes back one's own entry of the last quarter of an hour. */
 export function undoEntry(entry: LoggedEntry | undefined, here: Here): Handled {

@@ -1,0 +1,92 @@
+import type { RoundRow, RoundSheet } from '../../attachments/round/round-sheet.ts';
+import { roundTotals } from '../../attachments/round/round-totals.ts';
+import type { TotalToFetch } from '../../../core/dose/totals-to-fetch.ts';
+import { numberText, type DecimalMark } from '../../replies/number-text.ts';
+import { measureText } from '../../replies/quantity-text.ts';
+import type { Line } from '../../replies/reply.ts';
+import { line, listLine, part } from './line.ts';
+
+/** Lines up to which a round stands whole in its reply; of a longer one the sheet has the rest. */
+export const WHOLE_ROUND = 12;
+
+/** Rows of a longer round that its reply has room for, beside the totals, the problems and the cautions. */
+const ROOM = { cautioned: 12, fresh: 7 } as const;
+const FEWEST_ROWS = 3;
+const MOST_OPEN = 4;
+const MOST_NAMES = 8;
+
+/** The rows of a round and its totals, what has no amount apart, as far as one screen has room for them. */
+export function roundBody(
+  { head, rows, mark }: Pick<RoundSheet, 'head' | 'rows' | 'mark'>,
+  hasFullCautions: boolean,
+): Line[] {
+  const open = rows.filter(({ is }) => is === 'open');
+  const done = rows.filter(({ is }) => is !== 'open');
+  if (rows.length <= WHOLE_ROUND)
+    return [...head, ...linesOf(done), ...totalLines(rows, mark), ...openLines(open, open.length)];
+  const shownOpen = Math.min(open.length, MOST_OPEN);
+  const room = ROOM[hasFullCautions ? 'fresh' : 'cautioned'] - 2 * shownOpen;
+  const shown = done.slice(0, Math.max(FEWEST_ROWS, room));
+  const warned = done.slice(shown.length).filter(({ lines }) => lines.some(isWarning));
+  return [
+    ...totalLines(rows, mark),
+    ...openLines(open, shownOpen),
+    ...head,
+    ...linesOf(shown),
+    ...(done.length > shown.length
+      ? [line('first', 'round-more', { count: String(done.length - shown.length) })]
+      : []),
+    ...warnedLine(warned),
+  ];
+}
+
+const isWarning = ({ key }: Line): boolean => key.startsWith('warning-');
+
+/** Each row in its line; what a warning is about stands above it. */
+export function linesOf(rows: readonly RoundRow[]): Line[] {
+  const lines = rows.flatMap((row) => row.lines);
+  return [...lines.filter((one) => !isWarning(one)), ...lines.filter(isWarning)];
+}
+
+/** What has no amount, under a heading of its own: nothing of it is in the totals. */
+function openLines(open: readonly RoundRow[], shown: number): Line[] {
+  if (open.length === 0) return [];
+  const rest = open.length - shown;
+  return [
+    line('first', 'round-open', { count: open.length === 1 ? 'one' : String(open.length) }),
+    ...linesOf(open.slice(0, shown)),
+    ...(rest > 0 ? [line('first', 'round-open-more', { count: String(rest) })] : []),
+  ];
+}
+
+/** Vessels whose line has no room here, and a warning. */
+function warnedLine(warned: readonly RoundRow[]): Line[] {
+  const names = warned.slice(0, MOST_NAMES).map(({ name }) => part('round-name', { name }));
+  const rest = warned.length - names.length;
+  return listLine('caution', 'round-warned', [
+    ...names,
+    ...(rest > 0 ? [part('round-and-more', { count: String(rest) })] : []),
+  ]);
+}
+
+/** What to fetch of each additive, and that it is the sum of the amounts as they are shown; nothing for a single amount. */
+export function totalLines(rows: readonly RoundRow[], mark: DecimalMark): Line[] {
+  const amounts = rows.filter(({ is }) => is === 'amount');
+  const count = amounts.flatMap(({ weighed }) => weighed).reduce((sum, one) => sum + one.count, 0);
+  if (count < 2) return [];
+  const list = roundTotals(rows).map((total) => totalPart(total, mark));
+  return listLine('first', 'round-total', list).map((one) => ({ ...one, values: { count: String(count) } }));
+}
+
+/** The total of an additive, with what it has to be told from others by. */
+export function totalPart(total: TotalToFetch, mark: DecimalMark): Omit<Line, 'room'> {
+  const { additive, measure, strength_percent, tablet_SO2_g, tablet_salt_g } = total;
+  const size = tablet_salt_g ?? tablet_SO2_g;
+  return part('round-total-of', {
+    amount: measureText(measure, mark),
+    kind: measure.unit !== 'tablets' ? 'other' : tablet_salt_g === undefined ? 'tablet' : 'salt-tablet',
+    additive,
+    size: numberText(size ?? 0, 2, mark),
+    strength: strength_percent === undefined ? 'none' : numberText(strength_percent, 2, mark),
+  });
+}
