@@ -226,6 +226,84 @@ button-all-the-same = Yes, all the same
 over-rule-noted = Kept with it: over the limit ({ rule-short }).
 total-sum = total { $total } ({ $measured } measured { $day } + { $since } added since)
 assumed-law = unknown is taken at its strictest for the law
+limit-is =
+    { at }{ $operator ->
+        [below] below
+       *[at-most] at most
+    } { $limit } { $unit } { $of } SO2: { rule-short }{ $written ->
+        [same] {""}
+       *[other] , written { $value } { $law_unit }
+    }{ $density ->
+        [none] {""}
+       *[other] {" "}(at density { $density })
+    }{ $uplift ->
+        [none] {""}
+       *[other] , of it { $uplift } for the declared year
+    }.
+limit-room =
+    { $standing ->
+        [over] Now { $now } { $of }: over it by { $room } { $unit }.
+       *[room] Now { $now } { $of }: room { $room } { $unit }; { $left } with { $kept } kept below it.
+    }
+limit-amount = { $left } mg/L in { $volume }: { bare-amount } { additive }.
+limit-text =
+    { $text }{ $provision ->
+        [none] {""}
+       *[other] , { $provision }
+    }{ $version ->
+        [none] {""}
+       *[other] {" "}({ $version })
+    }: { $checked ->
+        [law-text] read in the text of the law
+        [law-copy] read in a copy of the law
+        [agency] read on the agency’s page
+        [foreign-agency] read on another country’s agency page
+        [trade-guide] read in a trade guide
+        [secondary] read in a secondary source
+       *[memory] from memory, so unconfirmed: it makes no dose smaller
+    }.
+limit-none =
+    { at }no limit on file: { law-of }, { $product ->
+        [still] wine
+        [sparkling] sparkling wine
+        [quality-sparkling] quality sparkling
+        [other-sparkling] sparkling wine
+        [fortified] fortified wine
+        [fruit-wine] fruit wine
+        [alcohol-free] alcohol-free wine
+       *[other] { $product }
+    }{ $reason ->
+        [not-found] {" "}(looked for, not found)
+       *[other] {""}
+    }. I do not guess: look it up for your market.
+limit-notes = Note: { $list }.
+limit-notes-separator = {"; "}
+law-note =
+    { $code ->
+        [recommends-only] the code recommends, your country’s law decides
+        [other-value-told] another figure is told elsewhere
+        [boundary-open] the text leaves this very sugar open, the stricter side was taken
+        [boundary-told-otherwise] the page that was read has the other side of this boundary
+        [dry-undefined] dry and sweet are given without a figure
+        [band-misprinted] the sheet prints the band the wrong way round
+        [by-reference] by reference to the EU text
+        [derived] two figures that were read, subtracted
+        [combined-as-total] the text says combined, taken as total
+        [from-seven-percent] for wine of 7 % and more
+        [bulk-has-less] bulk wine for export has a lower limit
+        [stacks-on-general] the general limit holds beside it
+        [sugar-assumed] sugar unknown, taken at its strictest
+        [colour-assumed] colour unknown, taken at its strictest
+        [sparkling-class-assumed] class of sparkling unknown, the stricter was taken
+        [density-assumed] density unknown, taken as 0.990 (say: density 0.995)
+        [designation-not-on-file] no row on file for that designation
+        [no-uplift] no more in a declared year here
+        [organic-not-on-file] no organic limit on file, the general one was taken
+        [repealed] { $value } { $unit } was repealed and is not used
+        [other-unit-told] another source has { $value } { $unit }
+       *[second-value-told] { $value } { $unit } is told elsewhere, from memory
+    }
+limit-care = Not legal advice: confirm for your market.
 designation-asked = Sweet wine of a designation with a limit of its own ({ law-of })? I never infer it: say so, like: { $wine } designated 300
 
 ## The first line: a choice and not a dose
@@ -571,8 +649,10 @@ warning-stage-not-over =
        *[fermenting] ⚠ Fermenting wine binds it at once, and it does not stop yeast reliably: ask whoever answers for this wine first.
     }
 warning-additive-not-permitted =
-    { $additive ->
-        [ammonium-bisulfite-solution] ⚠ Ammonium bisulfite is for grapes and must only (OIV): not for this wine; ask first.
+    { $reason ->
+        [ammonium] ⚠ Ammonium bisulfite is for grapes and must only (OIV): not for this wine; ask first.
+        [organic] ⚠ Organic wine takes SO2 and potassium salts only ({ $rule }): not this one. Ask first.
+        [organic-none] ⚠ Wine labelled organic in the US takes no added sulfite at all ({ $rule }). Ask first.
        *[sodium] ⚠ Sodium metabisulfite: many rules bar it from wine (OIV; EU and UK unconfirmed). Ask first.
     }
 warning-total-over-limit =
@@ -1353,6 +1433,7 @@ setting-basis =
         [oiv] OIV
        *[other] pK 1.81
     } (basis OIV, basis 1.81)
+setting-law = Law: { law-of } (law EU, law US)
 setting-zone =
     Time zone: { $zone ->
         [none] not told, so UTC
@@ -1379,6 +1460,7 @@ setting-wrong =
         [quiet] Like: quiet 20 to 6
         [daily] Like: daily list at 7:30
         [zone] Like: time zone Europe/Madrid
+        [law] No limit on file there. On file: OIV, EU, UK, US, CA, AU, NZ, ZA, AR, CL, BR, JP, KR, CN, Codex, CH, GE, HK, EAEU. Like: law EU
         [allowance] Like: allowance 30%
         [basis] Like: basis OIV
         [ph-days] Like: pH counts 14 days

@@ -8,7 +8,6 @@ import type {
   WineFacts,
 } from '../../core/dose/request.ts';
 import { litresTo } from '../../core/units/volume.ts';
-import type { Basis } from '../../core/wine.ts';
 import type { AskedField, Fields, Reading } from '../reader/understood.ts';
 import type { Settings } from './settings.ts';
 
@@ -64,19 +63,36 @@ function volumeOf({
   return { volume_L, volume_display: { value, unit: volumeUnit } };
 }
 
-function wineOf({ fields }: Reading): WineFacts {
-  return pick(fields, [
-    'ph',
-    'free_mg_L',
-    'total_mg_L',
-    'temperature_C',
-    'alcohol_percent',
-    'sugar_g_L',
-    'style',
-    'category',
-    'product',
-  ]);
+/** What is known of the wine; the law of the market is the cellar's. */
+function wineOf({ fields, totalOf }: Reading, { region }: Pick<Settings, 'region'>): WineFacts {
+  return {
+    region,
+    ...(fields.total_mg_L !== undefined && {
+      total_from: totalOf === undefined ? ('measured' as const) : ('running-sum' as const),
+    }),
+    ...pick(fields, WINE_FIELDS),
+  };
 }
+
+const WINE_FIELDS = [
+  'ph',
+  'free_mg_L',
+  'total_mg_L',
+  'temperature_C',
+  'alcohol_percent',
+  'sugar_g_L',
+  'style',
+  'category',
+  'product',
+  'organic',
+  'designated_mg_L',
+  'uplift',
+  'quality',
+  'pdo',
+  'bulk',
+  'density_kg_L',
+  'reserve_mg_L',
+] as const satisfies readonly (keyof Fields)[];
 
 function amountOf({ fields }: Reading): StatedAmount {
   return pick(fields, ['mass_g', 'additive_volume_mL', 'tablets', 'rate_mg_L', 'added_mg_L']);
@@ -94,14 +110,15 @@ function optionalAdditive(reading: Reading): { additive?: AdditiveAtHand } {
 /** The question for a dose that a reading asks. Assumptions count as facts; what is asked stays out. */
 export function toDoseRequest(
   reading: Reading,
-  { basis, targets }: Pick<Settings, 'basis' | 'targets'>,
+  settings: Pick<Settings, 'basis' | 'region' | 'targets'>,
 ): DoseRequest {
+  const { basis, targets } = settings;
   const count = countOf(reading);
   const target = reading.asks.includes('target')
     ? undefined
     : (reading.fields.target ?? reading.assumed.target);
   return {
-    ...wineOf(reading),
+    ...wineOf(reading, settings),
     ...volumeOf(reading),
     ...(count !== undefined && { vessels: count }),
     ...optionalAdditive(reading),
@@ -115,15 +132,18 @@ export function toDoseRequest(
 }
 
 /** The question for what an amount does. */
-export function toEffectRequest(reading: Reading, basis: Basis): EffectRequest {
+export function toEffectRequest(
+  reading: Reading,
+  settings: Pick<Settings, 'basis' | 'region'>,
+): EffectRequest {
   return {
-    ...wineOf(reading),
+    ...wineOf(reading, settings),
     ...amountOf(reading),
     ...volumeOf(reading),
     ...optionalAdditive(reading),
     ...stageOf(reading),
     toStopFermentation: reading.notes.some(({ id }) => id === 'ferment-stop'),
-    basis,
+    basis: settings.basis,
   };
 }
 
@@ -132,10 +152,37 @@ export function toAddedRequest(reading: Reading): AddedRequest {
   return { ...amountOf(reading), ...volumeOf(reading), ...optionalAdditive(reading) };
 }
 
-/** The stock that is to be made up; undefined while its volume or its salt is asked. */
+/** What a solution in water is for, where it is no stock. */
+const USES = { holding: 'holding', cleaning: 'rinse' } as const;
+
+/** What goes into a holding solution or a rinse: of no strength of its own, metabisulfite powder. */
+function powderForUse({ fields, assumed }: Reading): AdditiveAtHand | undefined {
+  const id = fields.additive ?? assumed.additive ?? '';
+  if (fields.additive !== undefined && !id.includes('metabisulfite')) return undefined;
+  return { id: id.startsWith('sodium') ? 'sodium-metabisulfite' : 'potassium-metabisulfite' };
+}
+
+/** The solution that is to be made up; undefined while its volume or its salt is asked. */
 export function toSolutionRequest(reading: Reading): SolutionRequest | undefined {
-  const additive = additiveOf(reading);
+  const { fields, marks } = reading;
   const { volume_L, ...shown } = volumeOf(reading);
+  const { solutionUse } = marks;
+  const use = solutionUse === 'holding' || solutionUse === 'cleaning' ? USES[solutionUse] : undefined;
+  const amounts = pick(fields, ['mass_g', 'additive_volume_mL']);
+  const isByRecipe =
+    use !== undefined && fields.strength_percent === undefined && Object.keys(amounts).length === 0;
+  const additive = isByRecipe ? powderForUse(reading) : additiveOf(reading);
   if (additive === undefined || volume_L === undefined) return undefined;
-  return { volume_L, ...shown, additive, ...pick(reading.fields, ['mass_g', 'additive_volume_mL']) };
+  const { target } = fields;
+  return {
+    volume_L,
+    ...shown,
+    additive,
+    ...amounts,
+    ...pick(fields, ['temperature_C']),
+    ...(use !== undefined && { use }),
+    ...(target !== undefined && 'add_mg_L' in target && target.add_mg_L > 0
+      ? { rise_mg_L: target.add_mg_L }
+      : {}),
+  };
 }

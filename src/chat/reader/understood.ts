@@ -138,6 +138,8 @@ export interface Marks {
   /** A cask without a usual size was named. */
   casksWithoutSize?: true;
   solutionUse?: 'holding' | 'cleaning' | 'make-up';
+  /** Sulfur that is burnt was named: a disc, a wick. */
+  wick?: true;
   /** The first line of the round said that all this was added. */
   pastLine?: true;
   /** `each` stood beside the volume of several vessels. */
@@ -193,6 +195,10 @@ export interface Reading {
   readonly remark?: string;
   /** Fields that stand for what is known of the vessel and not for what was said, with the time they are of. */
   readonly recalled?: Readonly<Partial<Record<FieldName, number>>>;
+  /** Where the total is a sum: the total that was measured, and what went in since, in mg/L. */
+  readonly totalOf?: { readonly measured_mg_L: number; readonly since_mg_L: number };
+  /** The rule of the law that the dose passes, where it was asked for all the same. */
+  readonly over_rule?: string;
   /** Fields that the log has had from this person already, when the reading goes on over several messages. */
   readonly noted?: readonly FieldName[];
   /** The key of the event that noted them, when buttons of the reading may still move its time. */

@@ -423,8 +423,18 @@ export interface SentenceValues {
   'landed-too-high': 'added' | 'rise' | 'unit' | 'vessel';
   'last-keeper': 'name';
   'law-decides': 'region';
+  'law-note': 'code' | 'unit' | 'value';
   'law-of': 'region';
   'left-unread': 'count';
+  'limit-amount': 'additive' | 'amount' | 'count' | 'left' | 'unit' | 'volume';
+  'limit-care': never;
+  'limit-is':
+    'band' | 'class' | 'density' | 'high' | 'law_unit' | 'limit' | 'low' | 'of' | 'operator' | 'organic' | 'region' | 'unit' | 'uplift' | 'value' | 'vessel' | 'what' | 'written';
+  'limit-none': 'product' | 'reason' | 'region' | 'vessel';
+  'limit-notes': 'list';
+  'limit-notes-separator': never;
+  'limit-room': 'kept' | 'left' | 'now' | 'of' | 'room' | 'standing' | 'unit';
+  'limit-text': 'checked' | 'provision' | 'text' | 'version';
   'list-more': 'count';
   'list-separator': never;
   measure: 'vessel';
@@ -691,6 +701,7 @@ export interface SentenceValues {
   'setting-basis': 'basis';
   'setting-check-days': 'often' | 'usual';
   'setting-daily': 'daily';
+  'setting-law': 'region';
   'setting-ph-days': 'days';
   'setting-quiet': 'from' | 'to';
   'setting-set': 'list';
@@ -834,7 +845,7 @@ export interface SentenceValues {
   'vessels-none': never;
   'volume-differs': 'known' | 'said' | 'vessel' | 'written';
   'warning-addition-large': 'dose_mg_L' | 'unit';
-  'warning-additive-not-permitted': 'additive';
+  'warning-additive-not-permitted': 'reason' | 'rule';
   'warning-already-dosed': never;
   'warning-basis-fallback': never;
   'warning-basis-fallback-change':

@@ -19,6 +19,7 @@ import { roundDoseLine, roundNothingLine } from '../lines/round-dose.ts';
 import { vesselText } from '../lines/vessel.ts';
 import { underLines, warningLines } from '../lines/warnings.ts';
 import { workingLines } from '../lines/working.ts';
+import { doseOf } from '../dose-of.ts';
 import type { Outcome, Turn } from '../outcome.ts';
 import { toBeWeighed } from '../to-be-weighed.ts';
 import { additiveOf, toDoseRequest } from '../to-requests.ts';
@@ -40,7 +41,7 @@ const SAID_BY_THE_CHOICE: readonly WarningCode[] = [
 /** The answer to a question for a dose: no sulfite now, a choice, a dose, or what can be said so far and one question. */
 export function answerDose(reading: Reading, turn: Turn): Outcome {
   const request = toDoseRequest(reading, turn.settings);
-  const answer = dose(request);
+  const answer = doseOf(reading, turn.settings);
   if (reading.notes.some(({ id }) => id === 'ferment-stop')) return fermentStop(reading, null, turn);
   const refused = noDose(reading, answer, turn) ?? notPermitted(reading, answer, turn);
   if (refused) return refused;

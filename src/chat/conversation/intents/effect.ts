@@ -25,7 +25,7 @@ import { fermentStop } from './ferment-stop.ts';
 
 /** The answer to "what does this amount do": mg/L it adds, and where the wine lands. */
 export function answerEffect(reading: Reading, turn: Turn): Outcome {
-  const answer = effect(toEffectRequest(reading, turn.settings.basis));
+  const answer = effect(toEffectRequest(reading, turn.settings));
   if (reading.notes.some(({ id }) => id === 'ferment-stop')) return fermentStop(reading, answer, turn);
   const additive = additiveOf(reading);
   if (reading.asks.length > 0 || additive === undefined || answer.adds_mg_L === undefined)

@@ -8,6 +8,7 @@ import type { Button, Line } from '../../replies/reply.ts';
 import { buttonsFor, type LABELS } from '../buttons.ts';
 import { redFigures } from '../lines/condition.ts';
 import { cautionLines } from '../lines/cautions.ts';
+import { stepsOfSolution } from '../intents/solution.ts';
 import { line } from '../lines/line.ts';
 import { vesselText } from '../lines/vessel.ts';
 import { allWarningLines } from '../lines/warnings.ts';
@@ -35,7 +36,7 @@ function reckonAgain(reading: Reading, settings: Settings): Reckoned {
       return { ...added(toAddedRequest(reading)), warnings: [] };
     case 'solution': {
       const request = toSolutionRequest(reading);
-      return request ? { ...solution(request), warnings: [] } : { steps: [], warnings: [] };
+      return { steps: request ? stepsOfSolution(solution(request)) : [], warnings: [] };
     }
     case 'dose':
       return doseOf(reading, settings);

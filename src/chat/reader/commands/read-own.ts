@@ -44,6 +44,7 @@ const OPENERS: ReadonlySet<OwnWordId> = new Set([
   'zone', 'we-are-in', 'allowance', 'basis', 'replies', 'counts', 'every',
   'picture', 'round', 'added-it', 'done', 'invite', 'keeper', 'hand', 'guest', 'people', 'remove', 'join', 'at-cellar', 'cellars', 'cellar-is', 'name-cellar',
   'read-along', 'only-called', 'law', 'limit', 'full-dose', 'yes',
+  'stock', 'received', 'used-up', 'discarded', 'counted', 'in-store',
 ]); // prettier-ignore
 
 /** Whether a message could be talk to the bot at all: one of its own words opens it, it is a day, or asks for a vessel. */
@@ -65,7 +66,7 @@ function commandOf(board: Board, talk: Talk): Draft | undefined {
     if (LONG.includes(read)) return { ...emptyReading('command'), command };
     return { ...draftOfBoard(talk.board, 'command'), command };
   }
-  return readOrder(talk) ?? readLimit(talk);
+  return readStock(talk) ?? readOrder(talk) ?? readLimit(talk);
 }
 
 /**

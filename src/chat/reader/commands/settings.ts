@@ -2,6 +2,7 @@ import type { Command } from '../command.ts';
 import { readAllowance } from './settings/allowance.ts';
 import { readBasis } from './settings/basis.ts';
 import { readDays } from './settings/days.ts';
+import { readLaw } from './settings/law.ts';
 import { readReplies } from './settings/replies.ts';
 import { readTargetSetting } from './settings/target.ts';
 import { readTimes } from './settings/times.ts';
@@ -18,6 +19,7 @@ const READERS = [
   readZone,
   readAllowance,
   readBasis,
+  readLaw,
   readReplies,
   readDays,
 ];

@@ -12,7 +12,9 @@ import { changeRole, listPeople } from './people.ts';
 import { drawPicture } from './picture.ts';
 import { daySheet, historySheet } from './sheets.ts';
 import { forgetPerson } from './forget-person.ts';
+import { limitSheet } from './limit-sheet.ts';
 import { listVessels, listDue, listOrders } from './lists.ts';
+import { lastSheet } from '../../round/take-sheet.ts';
 import { setSetting, settingWrong, showSettings } from './settings.ts';
 import { strikeEntry, undoEntry } from './undo.ts';
 import { takeAway } from './take-away.ts';
@@ -60,6 +62,12 @@ export async function answerCommand(
       return takeAway(command, fields.vessel, here);
     case 'forget-me':
       return forgetPerson(here, view);
+    case 'round-sheet':
+      return lastSheet(command.form, here, view);
+    case 'limit':
+      return limitSheet(reading, here);
+    case 'full-dose':
+      return replying(here, { lines: [line('first', 'full-dose-none')] });
     case 'picture':
       return drawPicture(fields.vessel, here);
     case 'added-it':

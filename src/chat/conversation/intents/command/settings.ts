@@ -21,6 +21,7 @@ export function showSettings(here: Here): Handled {
     'setting-target',
     'setting-allowance',
     'setting-basis',
+    'setting-law',
     'setting-zone',
     'setting-daily',
     'setting-quiet',
@@ -86,6 +87,8 @@ function changeOf(setting: Setting, settings: Settings): CellarSettings | undefi
       return { allowance_percent: setting.percent };
     case 'basis':
       return { basis: setting.basis };
+    case 'law':
+      return { region: setting.region };
     case 'short-replies':
       return { shortReplies: setting.on };
     case 'ph-days':
@@ -133,6 +136,7 @@ function valuesOf(settings: Settings, { memory }: Pick<Here, 'memory'>): Record<
     sweet: said(targets.sweet),
     percent: settings.allowance_percent === undefined ? 'none' : said(settings.allowance_percent),
     basis: settings.basis,
+    region: settings.region,
     zone: settings.zone ?? 'none',
     daily: daily === 'off' ? 'off' : minuteText(daily),
     from: minuteText(quiet.from_minute),
