@@ -6,8 +6,11 @@ import { checkAmount, checkFacts } from './check-request.ts';
 import { doseSteps } from './dose-steps.ts';
 import { effectSteps } from './effect-steps.ts';
 import { givenBy } from './given-amount.ts';
+import { limitWarnings } from './limit-warnings.ts';
 import { portionOf } from './portion.ts';
 import type { AddedRequest } from './request.ts';
+import { decidingLimit, roomToLimit } from './room-to-limit.ts';
+import { inOrder } from './warnings.ts';
 
 /**
  * What follows from an addition that was made: its mg/L of SO2 where the volume is known, its SO2 in grams, and the
@@ -44,8 +47,24 @@ export function added(request: AddedRequest): AddedAnswer {
     ...(additive_volume_mL === undefined ? {} : { additive_volume_mL }),
     ...(tablets === undefined ? {} : { tablets }),
     ...given,
-    warnings: [],
+    ...afterAddition(request, adds_mg_L),
     steps,
+  };
+}
+
+/** How the total stands once the addition is in, where the total before it is known. */
+function afterAddition(
+  request: AddedRequest,
+  added_mg_L: number | undefined,
+): Pick<AddedAnswer, 'total_after_mg_L' | 'limit' | 'warnings'> {
+  const { total_mg_L, total_from } = request;
+  if (total_mg_L === undefined || added_mg_L === undefined) return { warnings: [] };
+  const room = roomToLimit(request);
+  const limit = decidingLimit(room, added_mg_L);
+  return {
+    total_after_mg_L: total_mg_L + added_mg_L,
+    ...(limit === undefined ? {} : { limit }),
+    warnings: inOrder(limitWarnings(room, added_mg_L, total_from === undefined ? {} : { total_from })),
   };
 }
 
@@ -77,7 +96,7 @@ function fromConcentration(request: AddedRequest, added_mg_L: number, additive: 
     ...(mass_g === undefined ? {} : { mass_g }),
     ...(additive_volume_mL === undefined ? {} : { additive_volume_mL }),
     ...(tablets === undefined ? {} : { tablets }),
-    warnings: [],
+    ...afterAddition(request, added_mg_L),
     steps,
   };
 }

@@ -2,6 +2,7 @@ import type { AdditiveId } from '../additives/additive-id.ts';
 import type { Limit } from '../limits/limit.ts';
 import type { Basis, Target } from '../wine.ts';
 import type { Step } from '../working.ts';
+import type { SolutionUse } from './solution-recipes.ts';
 
 /** What a scale or a cylinder shows. */
 export interface Measure {
@@ -169,13 +170,42 @@ export interface AddedAnswer extends Partial<Amount> {
   readonly steps: readonly Step[];
 }
 
-/** The answer of a `solution`: a stock of salt in water. */
+/** What a stock brings into one usual barrel. */
+export interface StockPerBarrel {
+  readonly barrel_L: number;
+  /** mg/L that one millilitre brings. */
+  readonly one_mL_adds_mg_L: number;
+  readonly rise_mg_L: number;
+  /** Millilitres for that rise. */
+  readonly additive_volume_mL: number;
+  readonly steps: readonly Step[];
+}
+
+/** What is published about how much of a salt dissolves, beside what was asked; g in a litre, °C. */
+export interface SolubilityNote {
+  /** `too-much`: no figures are given; `unknown-when-colder`: they are. */
+  readonly says: 'too-much' | 'unknown-when-colder';
+  readonly salt_g_per_L: number;
+  readonly least_g_per_L: number;
+  readonly most_g_per_L: number;
+  readonly at_C: number;
+  readonly temperature_C?: number;
+}
+
+/** The answer of a `solution`: a stock of salt in water, a holding solution or a rinse. Never a dose for wine. */
 export interface SolutionAnswer {
+  readonly use?: SolutionUse;
   readonly salt_g?: number;
+  readonly citric_acid_g?: number;
   readonly additive_volume_mL?: number;
   readonly volume_L: number;
   /** Absent where it does not follow (a solution by its mass). */
   readonly strength_SO2_g_per_100_mL?: number;
   readonly measure?: Measure;
+  readonly per_barrel?: StockPerBarrel;
+  /** How long its strength may be trusted; common practice, no source. */
+  readonly keeps?: 'days-to-weeks';
+  /** Present where the salt does not surely dissolve, or where the water is colder than any published figure. */
+  readonly solubility?: SolubilityNote;
   readonly steps: readonly Step[];
 }

@@ -4,7 +4,7 @@ import { aimAt } from './aim.ts';
 import type { DoseChoice } from './answer.ts';
 import { portionOf } from './portion.ts';
 import type { DoseRequest } from './request.ts';
-import { standingAfter, type RoomToLimit } from './room-to-limit.ts';
+import { passesLimit, type RoomToLimit } from './room-to-limit.ts';
 import { CHOICES_APART_mg_L, FREE_NEED_HIGH_mg_L } from './thresholds.ts';
 
 /**
@@ -23,7 +23,7 @@ import { CHOICES_APART_mg_L, FREE_NEED_HIGH_mg_L } from './thresholds.ts';
  *   { ph: 4.1, free_mg_L: 45, stage: 'finished', stageStated: true, targetStated: false, basis: 'pk-1.81' },
  *   { molecular_mg_L: 0.6 },
  *   1.81,
- *   { found: { noneFor: 'cider' }, least_total_mg_L: 45, totalKnown: false },
+ *   { found: { notes: [] }, least_total_mg_L: 45, totalKnown: false, kept_mg_L: 15 },
  * ).map((choice) => choice.add_mg_L) // => [0, 15, 72.6]
  * ```
  */
@@ -39,7 +39,7 @@ export function choicesFor(
     const aim = target === undefined ? undefined : aimAt(target, request, pK);
     const add_mg_L = aim?.add_mg_L ?? 0;
     const dose_mg_L = aim?.dose_mg_L ?? 0;
-    const over = dose_mg_L > 0 && standingAfter(room, dose_mg_L) === 'over';
+    const over = dose_mg_L > 0 && passesLimit(room, dose_mg_L);
     return {
       ...(target === undefined ? {} : { target }),
       molecular_mg_L: molecularSO2(free_mg_L + add_mg_L, ph, pK),

@@ -5,6 +5,7 @@ import { molecularSO2 } from '../chemistry/molecular-so2.ts';
 import { STAGES_WITHOUT_TARGET, type Target } from '../wine.ts';
 import { aimAt, type Aim } from './aim.ts';
 import type { DoseAnswer, Warning } from './answer.ts';
+import { capped } from './capped.ts';
 import { checkDoseRequest } from './check-request.ts';
 import { choicesFor } from './choices.ts';
 import { doseSteps } from './dose-steps.ts';
@@ -13,7 +14,7 @@ import { landing } from './landing.ts';
 import { portionOf, type Portioned } from './portion.ts';
 import { redAmountWarnings } from './red-amount.ts';
 import type { DoseRequest } from './request.ts';
-import { roomToLimit } from './room-to-limit.ts';
+import { decidingLimit, limitsOn, roomToLimit } from './room-to-limit.ts';
 import { isRoundingCoarse } from './rounding.ts';
 import {
   additionWarnings,
@@ -72,16 +73,27 @@ export function dose(request: DoseRequest): DoseAnswer {
     warnings.push(
       ...(aim.dose_mg_L === undefined
         ? smellWarnings(now)
-        : additionWarnings({ dose_mg_L: aim.dose_mg_L, ...now, ...after, ...freeOf(request) }, room)),
+        : additionWarnings(
+            { dose_mg_L: aim.dose_mg_L, ...now, ...after, ...freeOf(request), ...totalFromOf(request) },
+            room,
+          )),
     );
   }
   const choices =
     target !== undefined && isChoice(request, aim) ? choicesFor(request, target, pK, room) : undefined;
+  const { dose_mg_L, add_mg_L } = aim;
+  const cap =
+    dose_mg_L === undefined || add_mg_L === undefined
+      ? undefined
+      : capped(request, { dose_mg_L, add_mg_L }, room, pK);
+  const limit = target === undefined ? undefined : decidingLimit(room, dose_mg_L ?? 0);
   return {
     ...now,
     ...aim,
     ...portioned?.shown,
     ...after,
+    ...(limit === undefined ? {} : { limit, limits: limitsOn(room) }),
+    ...(cap === undefined ? {} : { capped: cap }),
     warnings: inOrder(warnings),
     ...(choices === undefined ? {} : { choices }),
     steps: doseSteps({
@@ -107,6 +119,9 @@ function withoutTarget(request: DoseRequest): DoseRequest {
 
 const freeOf = ({ free_mg_L }: DoseRequest): { free_mg_L?: number } =>
   free_mg_L === undefined ? {} : { free_mg_L };
+
+const totalFromOf = ({ total_from }: DoseRequest): Pick<DoseRequest, 'total_from'> =>
+  total_from === undefined ? {} : { total_from };
 
 /** A high need that nobody stated is a choice and not a dose; it is told in whole mg/L, and so it is compared. */
 const isHigh = (request: DoseRequest, aim: Aim): boolean =>

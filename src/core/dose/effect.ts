@@ -7,7 +7,7 @@ import { fallbackWarnings } from './fallback-warning.ts';
 import { givenBy } from './given-amount.ts';
 import { landing } from './landing.ts';
 import type { EffectRequest } from './request.ts';
-import { roomToLimit } from './room-to-limit.ts';
+import { decidingLimit, limitsOn, roomToLimit } from './room-to-limit.ts';
 import { additionWarnings, factWarnings, stageNotOverWarnings } from './shared-warnings.ts';
 import { inOrder } from './warnings.ts';
 
@@ -36,6 +36,8 @@ export function effect(request: EffectRequest): EffectAnswer {
   const { pK } = dissociation;
   const after = adds_mg_L === undefined ? {} : landing(request, adds_mg_L, adds_mg_L, pK);
   const lands = 'molecular_after_mg_L' in after;
+  const room = roomToLimit(request);
+  const limit = adds_mg_L === undefined ? undefined : decidingLimit(room, adds_mg_L);
   const warnings: Warning[] = [...factWarnings(request), ...stageNotOverWarnings(request.stage)];
   if (request.toStopFermentation) {
     warnings.push({
@@ -50,14 +52,15 @@ export function effect(request: EffectRequest): EffectAnswer {
         ? {}
         : { molecular_mg_L: molecularSO2(free_mg_L, ph, pK) }),
     };
-    const room = roomToLimit(request);
-    warnings.push(...additionWarnings({ dose_mg_L: adds_mg_L, ...readings, ...after }, room));
+    const from = request.total_from === undefined ? {} : { total_from: request.total_from };
+    warnings.push(...additionWarnings({ dose_mg_L: adds_mg_L, ...readings, ...after, ...from }, room));
     if (lands && ph !== undefined) warnings.push(...fallbackWarnings(dissociation, { ph, ...readings }));
   }
   return {
     ...given,
     ...after,
     ...(lands ? { pK, basis: dissociation.basis } : {}),
+    ...(limit === undefined ? {} : { limit, limits: limitsOn(room) }),
     warnings: inOrder(warnings),
     steps: effectSteps({
       request,

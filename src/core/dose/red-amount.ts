@@ -2,7 +2,7 @@ import { aimAt } from './aim.ts';
 import type { Measure, Warning } from './answer.ts';
 import { portionOf } from './portion.ts';
 import type { DoseRequest } from './request.ts';
-import { standingAfter, type RoomToLimit } from './room-to-limit.ts';
+import { decidingLimit, passesLimit, type RoomToLimit } from './room-to-limit.ts';
 import { RED_TARGET_MOLECULAR_mg_L, STYLE_MATTERS_ABOVE_PH } from './thresholds.ts';
 
 const measureValues = (measure: Measure | undefined, prefix = ''): Record<string, number | string> =>
@@ -40,7 +40,7 @@ const isColourOpen = (request: DoseRequest): boolean => {
  * redAmountWarnings(
  *   { ph: 3.4, stage: 'finished', stageStated: true, target: { molecular_mg_L: 0.8 }, targetStated: false, basis: 'pk-1.81' },
  *   1.81,
- *   { found: { noneFor: 'cider' }, least_total_mg_L: 0, totalKnown: false },
+ *   { found: { notes: [] }, least_total_mg_L: 0, totalKnown: false, kept_mg_L: 15 },
  * ) // => []
  * ```
  */
@@ -49,9 +49,8 @@ export function redAmountWarnings(request: DoseRequest, pK: number, room: RoomTo
   const aim = aimAt({ molecular_mg_L: redTargetOf(request) }, request, pK);
   const values: Record<string, number | string> = { style: 'red', ...aim };
   const dose_mg_L = aim.dose_mg_L ?? 0;
-  const { limit } = room.found;
-  if (limit !== undefined && dose_mg_L > 0 && standingAfter(room, dose_mg_L) === 'over') {
-    Object.assign(values, { over_limit: 'yes', limit_mg_L: limit.limit_mg_L });
+  if (dose_mg_L > 0 && passesLimit(room, dose_mg_L)) {
+    Object.assign(values, { over_limit: 'yes', limit_mg_L: decidingLimit(room, dose_mg_L)?.limit_mg_L });
   }
   if (dose_mg_L > 0) {
     const shown = portionOf(request, dose_mg_L, room.ceiling_mg_L)?.shown;

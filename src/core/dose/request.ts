@@ -13,6 +13,7 @@ export interface LawFacts extends Pick<
   /** Where the total is from: a reading, or a reading and what went in since. */
   readonly total_from?: 'measured' | 'running-sum';
 }
+import type { SolutionUse } from './solution-recipes.ts';
 
 /** What is known of the wine. Units stand in the names; every one may be unknown. */
 export interface WineFacts extends LawFacts {
@@ -75,8 +76,9 @@ export interface EffectRequest extends WineFacts, StatedAmount {
   readonly basis: Basis;
 }
 
-/** An addition that was made. */
-export interface AddedRequest extends StatedAmount {
+/** An addition that was made, and what is known of the wine before it. */
+export interface AddedRequest extends StatedAmount, WineFacts {
+  readonly stage?: Stage;
   readonly volume_L?: number;
   readonly volume_display?: VolumeShown;
   readonly additive?: AdditiveAtHand;
@@ -89,4 +91,10 @@ export interface SolutionRequest {
   readonly additive: AdditiveAtHand;
   readonly mass_g?: number;
   readonly additive_volume_mL?: number;
+  /** What it is for, where it is no stock; with neither strength nor amount the usual recipe is told. */
+  readonly use?: SolutionUse;
+  /** Of the water. */
+  readonly temperature_C?: number;
+  /** mg/L of SO2 for which the millilitres per barrel are told. */
+  readonly rise_mg_L?: number;
 }

@@ -91,10 +91,13 @@ export function measureOf(amount: number, instrument: Instrument, limits: Roundi
   let down = instrument === 'tablets';
   let value = toStep(amount, step, down);
   const useless = (): boolean => amount > 0 && (value === 0 || isCoarse(value - amount, amount, dose_mg_L));
-  while (step > finest * 1.5 && useless()) {
-    step = Number((step / 10).toFixed(2));
-    value = toStep(amount, step, down);
-  }
+  const refine = (): void => {
+    while (step > finest * 1.5 && useless()) {
+      step = Number((step / 10).toFixed(2));
+      value = toStep(amount, step, down);
+    }
+  };
+  refine();
   if (
     ceiling_mg_L !== undefined &&
     dose_mg_L !== undefined &&
@@ -103,6 +106,7 @@ export function measureOf(amount: number, instrument: Instrument, limits: Roundi
   ) {
     down = true;
     value = toStep(amount, step, true);
+    refine();
   }
   const change = value - amount;
   return {

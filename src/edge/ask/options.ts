@@ -1,6 +1,7 @@
 import { parseArgs } from 'node:util';
 import { ADDITIVES } from '../../core/additives/additives.ts';
 import type { AdditiveId } from '../../core/additives/additive-id.ts';
+import { REGIONS } from '../../core/limits/region.ts';
 import { DEFAULT_SETTINGS, withUnits, type Settings } from '../../chat/conversation/settings.ts';
 import { OperatorError } from '../operator-error.ts';
 import { isLanguage, LANGUAGES } from '../languages.ts';
@@ -16,16 +17,14 @@ export interface AskOptions {
   readonly data?: string;
   /** What of the file is to be printed, in place of answers. */
   readonly print?: KeptPart;
-  /** Options that are accepted, but that this version does nothing with. */
-  readonly notServedYet: readonly string[];
 }
 
 const USAGE = `npm run -s ask -- "T4 1450 gal pH 3.58 free 21"
 npm run -s ask -- --jsonl < messages.jsonl
 npm run -s ask -- --data FILE --log, or --vessels
-options: --data FILE --language ${LANGUAGES.join('|')}  --basis pk-1.81|oiv  --additive NAME  --units metric|us|imperial`;
+options: --data FILE --language ${LANGUAGES.join('|')}  --basis pk-1.81|oiv  --additive NAME  --units metric|us|imperial
+--region ${REGIONS.join('|')}`;
 
-const NOT_SERVED_YET = ['region'] as const;
 const UNITS = ['metric', 'us', 'imperial'] as const;
 const BASES = ['pk-1.81', 'oiv'] as const;
 
@@ -72,7 +71,6 @@ function parse(args: readonly string[]) {
 export function readOptions(args: readonly string[]): AskOptions {
   const { values, positionals } = parse(args);
   const text = positionals.join(' ');
-  const notServedYet = NOT_SERVED_YET.filter((name) => values[name] !== undefined).map((name) => `--${name}`);
   const jsonl = values.jsonl ?? false;
   const asked = [text.trim() !== '', jsonl, values.log, values.vessels].filter(Boolean);
   if (asked.length !== 1)
@@ -88,17 +86,18 @@ export function readOptions(args: readonly string[]): AskOptions {
   const basis = oneOf('basis', values.basis, BASES);
   const additive = oneOf('additive', values.additive, USUAL as readonly AdditiveId[]);
   const units = oneOf('units', values.units, UNITS);
+  const region = oneOf('region', values.region?.trim().toLowerCase(), REGIONS);
   const settings: Settings = {
     ...withUnits(DEFAULT_SETTINGS, units ?? 'metric'),
     ...(values.language !== undefined && { language: values.language }),
     ...(basis !== undefined && { basis }),
+    ...(region !== undefined && { region }),
     ...(additive !== undefined && { usualAdditive: additive }),
   };
   return {
     jsonl,
     text,
     settings,
-    notServedYet,
     ...(data !== undefined && { data }),
     ...(print !== undefined && { print }),
   };

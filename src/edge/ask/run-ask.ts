@@ -41,7 +41,6 @@ export async function runAsk(parts: AskParts): Promise<number> {
     tell(error.message);
     return WRONG_OPTIONS;
   }
-  for (const name of options.notServedYet) tell(`${name} is not served yet; it changes nothing.`);
   try {
     const { print, data } = options;
     if (print === undefined || data === undefined) return await answer(options, parts);

@@ -29,7 +29,7 @@ describe('effect() of an amount in a volume', () => {
   test('without a settled additive it says nothing', () => {
     const { additive: _additive, ...request } = { additive: POWDER, mass_g: 100, volume_L: 2000 };
     const answer = added(request);
-    expect(answer).toEqual({ mass_g: 100, steps: [] });
+    expect(answer).toEqual({ mass_g: 100, warnings: [], steps: [] });
   });
 });
 

@@ -50,6 +50,9 @@ describe('an additive that the international code does not name for wine', () =>
     expect(valuesOf(answer, 'additive-not-permitted')).toEqual({
       additive: 'sodium-metabisulfite',
       rule: 'oiv-ii-1.12',
+      reason: 'sodium',
+      region: 'oiv',
+      confidence: 'read',
     });
   });
   test('a stock in water is made of either', () => {

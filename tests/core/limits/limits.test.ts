@@ -1,6 +1,6 @@
 import { expect, test } from 'vitest';
 import { checkLimit } from '../../../src/core/limits/check-limit.ts';
-import { limitFor } from '../../../src/core/limits/limit-for.ts';
+import { limitsFor } from '../../../src/core/limits/limits-for.ts';
 
 // OIV-MA-C1-01 (Oeno 9/98), read: up to 4 g/L of reducing substances 150 red, 200 white and rosé; above 4 g/L 300.
 test.each([
@@ -20,10 +20,13 @@ test.each([
   [{ product: 'cider' }, 'cider'],
   [{ product: 'mead' }, 'mead'],
   [{ product: 'fruit-wine', style: 'red' }, 'fruit-wine'],
+  [{ stage: 'must' }, 'must'],
 ] as const)('the limit of %j is %s', (facts, expected) => {
-  const found = limitFor(facts);
-  expect(found.limit?.limit_mg_L ?? found.noneFor).toBe(expected);
+  const { total, none } = limitsFor(facts);
+  expect(total?.limit_mg_L ?? none?.product).toBe(expected);
 });
+
+const AT_MOST_150 = { limit_mg_L: 150, operator: '<=' } as const;
 
 test.each([
   [134.9, 'within'],
@@ -31,11 +34,18 @@ test.each([
   [150, 'near'],
   [150.001, 'over'],
 ])('%d mg/L is %s a limit of 150', (total, standing) => {
-  expect(checkLimit(total, { limit_mg_L: 150 })).toBe(standing);
+  expect(checkLimit(total, AT_MOST_150)).toBe(standing);
+});
+
+test('a sum that is a hair off is the figure itself, on either side of the operator', () => {
+  expect(checkLimit(150 + 1e-12, AT_MOST_150)).toBe('near');
+  expect(checkLimit(346.5 - 1e-12, { limit_mg_L: 346.5, operator: '<' })).toBe('over');
+  expect(checkLimit(346.499, { limit_mg_L: 346.5, operator: '<' })).toBe('near');
 });
 
 test('a total or a sugar that cannot be is refused', () => {
-  expect(() => checkLimit(Number.NaN, { limit_mg_L: 150 })).toThrow(RangeError);
-  expect(() => checkLimit(-1, { limit_mg_L: 150 })).toThrow(RangeError);
-  expect(() => limitFor({ sugar_g_L: -1 })).toThrow(RangeError);
+  expect(() => checkLimit(Number.NaN, AT_MOST_150)).toThrow(RangeError);
+  expect(() => checkLimit(-1, AT_MOST_150)).toThrow(RangeError);
+  expect(() => limitsFor({ sugar_g_L: -1 })).toThrow(RangeError);
+  expect(() => limitsFor({ density_kg_L: 5 })).toThrow(RangeError);
 });

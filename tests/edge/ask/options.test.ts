@@ -15,13 +15,20 @@ test.each([
   [['--additive', 'sodium-metabisulfite'], { usualAdditive: 'sodium-metabisulfite' }],
   [['--units', 'us'], { volumeUnit: 'galUS', gallon: 'US', temperatureUnit: 'F' }],
   [['--units=imperial'], { volumeUnit: 'galUK', gallon: 'imperial' }],
-  [[], { language: 'en', basis: 'pk-1.81', usualAdditive: 'potassium-metabisulfite', volumeUnit: 'L' }],
+  [['--region', 'eu'], { region: 'eu' }],
+  [['--region=OIV'], { region: 'oiv' }],
+  [
+    [],
+    {
+      region: 'oiv',
+      language: 'en',
+      basis: 'pk-1.81',
+      usualAdditive: 'potassium-metabisulfite',
+      volumeUnit: 'L',
+    },
+  ],
 ])('options become settings: %j', (options, settings) => {
   expect(readOptions(['--jsonl', ...options]).settings).toMatchObject(settings);
-});
-
-test('options that cannot be served yet are accepted and named', () => {
-  expect(readOptions(['--region', 'eu', 'hi']).notServedYet).toEqual(['--region']);
 });
 
 test.each([
@@ -50,6 +57,12 @@ test.each([
   [['--data', 'a.db', '--jsonl', '--vessels']],
 ])('what there is not is refused with a sentence: %j', (args) => {
   expect(() => readOptions(args)).toThrow(OperatorError);
+});
+
+test('a market that is not on file is told with all that are', () => {
+  expect(() => readOptions(['--region', 'atlantis', 'hi'])).toThrow(
+    /--region must be one of oiv, eu, uk, us, ca,/,
+  );
 });
 
 test('a dash in front of a message is no option after two of them', () => {

@@ -1,6 +1,5 @@
 import type { AdditiveAtHand } from '../../../core/additives/additive-id.ts';
 import type { DoseAnswer, DoseChoice } from '../../../core/dose/answer.ts';
-import { limitFor } from '../../../core/limits/limit-for.ts';
 import type { Reading } from '../../reader/understood.ts';
 import { numberText } from '../../replies/number-text.ts';
 import { concentrationText, molecularText } from '../../replies/quantity-text.ts';
@@ -11,8 +10,7 @@ import { line } from './line.ts';
 import { measuredAmount } from './measured.ts';
 
 /** The limit of a wine as a text; `none` where we know of none. */
-export function limitText({ fields }: Reading, manner: Manner): string {
-  const { limit } = limitFor(fields);
+export function limitText({ limit }: Pick<DoseAnswer, 'limit'>, manner: Manner): string {
   return limit === undefined ? 'none' : perLitre(limit.limit_mg_L, manner);
 }
 
@@ -31,23 +29,26 @@ export function choiceLines(
     target: molecularText(target_molecular_mg_L ?? 0, manner.mark),
     free: perLitre(target_free_mg_L ?? 0, manner),
   });
-  const ways = choices.map((choice, at) => optionLine(choice, String(at + 1), reading, additive, manner));
-  return [head, ...redLine(reading, answer, manner), ...ways, line('first', 'ways-out')];
+  const ways = choices.map((choice, at) =>
+    optionLine(choice, String(at + 1), reading, answer, additive, manner),
+  );
+  return [head, ...redLine(answer, manner), ...ways, line('first', 'ways-out')];
 }
 
 /** For a red the full target is another one, with a figure and an amount of its own. */
-function redLine(reading: Reading, answer: DoseAnswer, manner: Manner): Line[] {
+function redLine(answer: DoseAnswer, manner: Manner): Line[] {
   const red = redFigures(answer);
   const free = red?.['target_free_mg_L'];
   if (red === undefined || typeof free !== 'number') return [];
   const values = { ...redValues(red, manner), free: concentrationText(free, manner.mark) };
-  return [line('first', 'choice-red', { ...values, limit: limitText(reading, manner) })];
+  return [line('first', 'choice-red', { ...values, limit: limitText(answer, manner) })];
 }
 
 function optionLine(
   choice: DoseChoice,
   mark: string,
   reading: Reading,
+  answer: DoseAnswer,
   additive: AdditiveAtHand | undefined,
   manner: Manner,
 ): Line {
@@ -58,13 +59,17 @@ function optionLine(
   };
   if (choice.target === undefined) return line('first', 'choice-leave', values);
   const amount = additive && measuredAmount(choice, additive, manner);
-  if (amount) return line('first', 'choice-to', { ...values, ...amount, total: totalFor(choice, reading) });
-  return line('first', 'choice-no-amount', { ...values, limit: limitText(reading, manner) });
+  if (amount)
+    return line('first', 'choice-to', { ...values, ...amount, total: totalFor(choice, reading, answer) });
+  return line('first', 'choice-no-amount', { ...values, limit: limitText(answer, manner) });
 }
 
 /** An unknown total matters where free SO2 alone would be more than half of the limit. */
-function totalFor({ free_mg_L }: DoseChoice, { fields }: Reading): 'known' | 'unknown' {
-  const { limit } = limitFor(fields);
+function totalFor(
+  { free_mg_L }: DoseChoice,
+  { fields }: Reading,
+  { limit }: DoseAnswer,
+): 'known' | 'unknown' {
   if (fields.total_mg_L !== undefined || limit === undefined) return 'known';
   return free_mg_L > limit.limit_mg_L / 2 ? 'unknown' : 'known';
 }
