@@ -1,0 +1,188 @@
+import type { StockEvent } from '../../../core/cellar/entry.ts';
+import type { Board } from '../board.ts';
+import { findingOf, freshBoard, isCue, isFree, isMark, placeOf, termAt } from '../board.ts';
+import type { Command } from '../command.ts';
+import { draftOfBoard } from '../draft-of-board.ts';
+import { findAdditive } from '../finders/additive.ts';
+import { findChemicalLot } from '../finders/chemical-lot.ts';
+import { findTablets } from '../finders/tablets.ts';
+import { findVessel } from '../finders/vessel.ts';
+import { findWhen } from '../finders/when.ts';
+import type { Piece } from '../own-pieces.ts';
+import { ownPieces } from '../own-pieces.ts';
+import type { Draft } from '../understood.ts';
+import type { OwnWordId } from '../words/words.ts';
+import { findStockAmount } from './stock-amount.ts';
+import type { Talk } from './talk.ts';
+import { says } from './talk.ts';
+
+/** The words that open what is told of the store, and what each tells. */
+const OPENERS = {
+  received: 'received',
+  'used-up': 'used',
+  discarded: 'discarded',
+  counted: 'counted',
+  stock: 'counted',
+} as const satisfies Readonly<Partial<Record<OwnWordId, StockEvent>>>;
+
+const OPENING = Object.keys(OPENERS) as (keyof typeof OPENERS)[];
+
+/** Words that may stand beside an amount and its additive. */
+const ALLOWED: readonly OwnWordId[] = ['filler', 'courtesy', 'of', 'some', 'in-store', 'is', 'left', 'now', 'for', 'stock', 'ask', 'show', 'still', 'has']; // prettier-ignore
+
+/** What may be found: a pH, a volume of wine, a vessel beside it, and it tells of wine. */
+const OF_STOCK = new Set(['additive', 'strength_percent', 'tablet_SO2_g', 'tablet_salt_g', 'tablets', 'mass_g', 'additive_volume_mL']); // prettier-ignore
+
+/** Longer names and purposes nobody types; own threshold. */
+const LONGEST = 60;
+
+/** The words behind a small word up to a lot, a moment, a comma or the end, as they were written. */
+interface Stretch {
+  readonly from: number;
+  readonly to: number;
+  readonly text: string;
+}
+
+function stretchBehind(board: Board, opener: Piece): Stretch | undefined {
+  const seen = freshBoard(board, { tells: true });
+  findWhen(seen);
+  const behind = board.pieces.slice(board.pieces.indexOf(opener) + 1);
+  const ends = behind.findIndex(
+    (piece) =>
+      piece.ids.includes('lot') ||
+      seen.ofWhen?.has(piece) === true ||
+      piece.kind === 'break' ||
+      /^[,;!]$/.test(piece.text),
+  );
+  const words = ends < 0 ? behind : behind.slice(0, ends);
+  const last = words.at(-1);
+  if (last === undefined) return undefined;
+  const to = last.text === '.' ? last.to - 1 : last.to;
+  const text = placeOf(board, opener.from, to).text.slice(opener.text.length).trim();
+  const isSaid = /\p{L}{2}/u.test(text) && text.length <= LONGEST;
+  return isSaid ? { from: opener.from, to, text } : undefined;
+}
+
+/** Whom it came from; a vessel is no supplier. */
+function supplierIn(board: Board): Stretch | undefined {
+  const opener = board.pieces.find(({ ids }) => ids.includes('supplier'));
+  return opener && stretchBehind(board, opener);
+}
+
+/** `for rinsing`, `to clean the hoses`: what is no wine. */
+function purposeIn(board: Board): Stretch | undefined {
+  const { pieces } = board;
+  const opener = pieces.find((piece, k) => {
+    const next = pieces[k + 1]?.ids.includes('article') ? pieces[k + 2] : pieces[k + 1];
+    return (piece.text === 'for' || piece.text === 'to') && next?.ids.includes('for-equipment') === true;
+  });
+  return opener && stretchBehind(board, opener);
+}
+
+function reasonIn(board: Board): Stretch | undefined {
+  const opener = board.pieces.find(({ ids }) => ids.includes('because'));
+  return opener && stretchBehind(board, opener);
+}
+
+/** The message without some of its terms, with the finders of an amount and its additive run over it. */
+function foundWithout(board: Board, cuts: readonly (Pick<Stretch, 'from' | 'to'> | undefined)[]): Board {
+  const isCut = (i: number): boolean => cuts.some((cut) => cut && i >= cut.from && i <= cut.to);
+  const terms = board.terms.filter((_, i) => !isCut(i));
+  const own: Board = {
+    ...freshBoard(board, { tells: true }),
+    terms,
+    pieces: ownPieces(terms, board.lexicon),
+    pastTense: true,
+  };
+  for (const find of [findChemicalLot, findWhen, findVessel, findTablets, findAdditive, findStockAmount])
+    find(own);
+  return own;
+}
+
+/** Whether every word that nothing was found in is one that may stand there. */
+const isRead = (board: Board): boolean =>
+  board.pieces.every(
+    (piece) =>
+      board.taken[piece.from] === true ||
+      board.ofWhen?.has(piece) === true ||
+      piece.kind === 'break' ||
+      (piece.kind === 'mark' && /^[,.;:!?()=-]$/.test(piece.text)) ||
+      isCue(board, piece.from, 'solution') ||
+      isCue(board, piece.from, 'powder') ||
+      piece.ids.some((id) => ALLOWED.includes(id)),
+  ) && !board.terms.some((_, i) => isFree(board, i));
+
+const isNamed = (board: Board): boolean =>
+  findingOf(board, 'additive') !== undefined ||
+  board.marks.unnamedAdditive === true ||
+  board.marks.campden === true;
+
+const hasAmount = (board: Board): boolean =>
+  board.findings.some(
+    ({ field }) => field === 'mass_g' || field === 'additive_volume_mL' || field === 'tablets',
+  );
+
+/** `stock solution 10%` makes one, and counts nothing. */
+const isOfSolution = (board: Board, opener: Piece): boolean =>
+  isCue(board, opener.to + 1, 'solution') || board.terms.some((_, i) => isMark(board, i, '%'));
+
+/** `how much kmbs is left`, `kmbs stock`: what is there of it. */
+function askedFor(talk: Talk): Draft | undefined {
+  if (!says(talk, 'in-store', 'stock')) return undefined;
+  // `kmbs stock` names no solution.
+  const own = foundWithout(
+    talk.board,
+    talk.board.pieces.filter(({ ids }) => ids.includes('stock')),
+  );
+  const isAsked = own.pieces.every(
+    (piece) =>
+      own.taken[piece.from] === true ||
+      piece.ids.includes('how-much') ||
+      piece.kind === 'mark' ||
+      piece.ids.some((id) => ALLOWED.includes(id)),
+  );
+  const names = own.findings.map(({ field }) => field);
+  if (!isAsked || names.length !== 1 || names[0] !== 'additive' || own.problems.length > 0) return undefined;
+  return { ...draftOfBoard(own, 'command'), command: { name: 'stock' } };
+}
+
+/**
+ * Reads what comes into the chemical store, goes out of it otherwise than into wine, and what is counted on the shelf:
+ * `received 25 kg kmbs lot 4471 from Norte Supplies`, `used 200 g kmbs for rinsing`, `stock kmbs 3.2 kg`; and `stock`,
+ * `stock kmbs`. An additive is named, and never the usual one; with a vessel or a volume of wine it is none of these.
+ */
+export function readStock(talk: Talk): Draft | undefined {
+  const { board, said, isQuestion } = talk;
+  const first = said.find(
+    ({ ids }) => !ids.includes('filler') && !ids.includes('ask') && !ids.includes('show'),
+  );
+  const opener = first && OPENING.find((id) => first.ids.includes(id));
+  if (first === undefined || opener === undefined) return askedFor(talk);
+  const isStock = opener === 'stock';
+  if (isStock ? isOfSolution(board, first) : isQuestion) return undefined;
+  const [supplier, purpose, reason] = [
+    opener === 'received' ? supplierIn(board) : undefined,
+    opener === 'used-up' ? purposeIn(board) : undefined,
+    opener === 'discarded' ? reasonIn(board) : undefined,
+  ];
+  if (opener === 'used-up' && purpose === undefined) return undefined;
+  const own = foundWithout(board, [{ from: first.from, to: first.to }, supplier, purpose, reason]);
+  if (!isRead(own) || !own.findings.every(({ field }) => OF_STOCK.has(field))) return undefined;
+  if (isStock && !hasAmount(own)) return shown(own);
+  if (!isNamed(own) || isQuestion) return undefined;
+  const said_ = purpose ?? reason;
+  const command: Command = {
+    name: 'stock-note',
+    event: OPENERS[opener],
+    ...(supplier && { supplier: supplier.text }),
+    ...(said_ && { purpose: said_.text }),
+  };
+  return { ...draftOfBoard(own, 'command'), command };
+}
+
+function shown(own: Board): Draft | undefined {
+  const isOne = own.findings.every(({ field }) => field === 'additive') && own.findings.length <= 1;
+  const isAlone = own.chemicalLot === undefined && own.when === undefined && own.problems.length === 0;
+  if (!isOne || !isAlone || own.marks.unnamedAdditive || termAt(own, 0).kind === 'number') return undefined;
+  return { ...draftOfBoard(own, 'command'), command: { name: 'stock' } };
+}
