@@ -92,6 +92,7 @@ function heldShares(
   high: number,
 ): readonly [number, number] | undefined {
   assertBetween('blend', 'SO2 in mg/L', Math.min(wine, other), 0);
+  if (low > high) return undefined;
   const slope = other - wine;
   if (slope === 0) return wine >= low && wine <= high ? [0, 1] : undefined;
   const [a, b] = [(low - wine) / slope, (high - wine) / slope];

@@ -1,6 +1,8 @@
+import { mixBinding } from '../binding/learned.ts';
 import type { Entry, VesselChange } from './entry.ts';
 import { freshVessel } from './fresh-vessel.ts';
 import { KEPT } from './kept-lengths.ts';
+import { learnedOf } from './learned-of.ts';
 import type { Known, KnownTraits, Vessel } from './vessel.ts';
 import { withoutPH } from './with-traits.ts';
 import { withoutVolume, withVolume } from './with-volume.ts';
@@ -107,9 +109,13 @@ function filled(from: Vessel, to: Vessel, { at, entry, volume_L }: Entry & Vesse
 }
 
 function blended(from: Vessel, to: Vessel, { at, entry, volume_L }: Entry & VesselChange): Vessel {
-  const { free_mg_L: _free, total_mg_L: _total, lot, empty: _empty, ...others } = to;
+  const { free_mg_L: _free, total_mg_L: _total, lot, empty: _empty, bound_before: _bound, ...others } = to;
   const came_L = volume_L ?? from.volume_L?.value;
   const whole_L = came_L === undefined || to.volume_L === undefined ? undefined : came_L + to.volume_L.value;
+  const bound_before =
+    came_L === undefined || to.volume_L === undefined || came_L <= 0 || to.volume_L.value <= 0
+      ? undefined
+      : mixBinding([learnedOf(to), to.volume_L.value], [learnedOf(from), came_L]);
   const additions = [...to.additions, ...from.additions].toSorted((a, b) => a.at - b.at || a.entry - b.entry);
   const mixed: Vessel = {
     ...others,
@@ -119,6 +125,8 @@ function blended(from: Vessel, to: Vessel, { at, entry, volume_L }: Entry & Vess
     unlanded: [],
     added_since_total_mg_L: 0,
     landings: [],
+    wine_since: at,
+    ...(bound_before && { bound_before }),
   };
   const unmeasured = withoutPH(mixed, 'blended', at);
   if (whole_L !== undefined) return withVolume(unmeasured, { value: whole_L, at, entry });

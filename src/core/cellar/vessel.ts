@@ -1,3 +1,4 @@
+import type { Learned } from '../binding/learned.ts';
 import type { Stage } from '../wine.ts';
 import type { AdditiveNoted, AmountNoted, WineTraits } from './entry.ts';
 
@@ -89,6 +90,10 @@ export interface Vessel {
   /** mg/L of SO2 that went in since the last measured total, as far as it is known. */
   readonly added_since_total_mg_L: number;
   readonly landings: readonly Landing[];
+  /** What the wines bound that it was mixed of, by volume. */
+  readonly bound_before?: Learned;
+  /** Since when the wine is the one it is: blended, fermented or through malolactic then. */
+  readonly wine_since?: number;
   readonly orders: readonly OpenOrder[];
   readonly later?: number;
   readonly unwatched?: true;

@@ -5,7 +5,7 @@ import type { Known, KnownTraits, Vessel } from './vessel.ts';
 
 /**
  * A vessel with what was told of its wine: alcohol in % vol, sugar in g/L. Wine that goes into malolactic or comes out
- * of it has another pH from then on, so that the pH known before is void.
+ * of it has another pH from then on, so that the pH known before is void, and binds otherwise than before.
  *
  * Source: common practice, no source (malolactic fermentation raises the pH).
  *
@@ -25,10 +25,17 @@ export function withTraits(vessel: Vessel, told: WineTraits, { at, entry }: Entr
   const traits: KnownTraits = { ...vessel.traits, ...Object.fromEntries(fresh) };
   const changed = { ...vessel, traits };
   const before = vessel.traits.stage?.value;
-  if (isFermented(before, told.stage)) return withoutPH({ ...changed, unlanded: [] }, 'fermentation', at);
+  if (isFermented(before, told.stage))
+    return withoutPH({ ...asNewWine(changed, at), unlanded: [] }, 'fermentation', at);
   const isMalolactic = told.stage !== undefined && told.stage !== before;
   if (!isMalolactic || (before !== 'malolactic' && told.stage !== 'malolactic')) return changed;
-  return withoutPH(changed, 'malolactic', at);
+  return withoutPH(asNewWine(changed, at), 'malolactic', at);
+}
+
+/** A wine that binds otherwise than before: what was learned of it holds no longer. */
+function asNewWine(vessel: Vessel, at: number): Vessel {
+  const { bound_before: _bound, ...others } = vessel;
+  return { ...others, landings: [], wine_since: at };
 }
 
 /** Whether what was must is wine now: its pH is another, and what went into the must has bound. */

@@ -1,0 +1,59 @@
+import type { FreePoint } from '../forecast/decline.ts';
+import { forecast, type Forecast } from '../forecast/forecast.ts';
+import type { Container } from '../forecast/published-rates.ts';
+import { isBarrel } from './is-barrel.ts';
+import type { Vessel } from './vessel.ts';
+
+/**
+ * The readings of free SO2 (mg/L) that show how this wine loses it: since its last addition, and since the wine is the
+ * one it is.
+ *
+ * Range: as many readings as a vessel keeps in sight.
+ *
+ * @example
+ * ```ts
+ * import { freshVessel } from './fresh-vessel.ts';
+ * const tank = { ...freshVessel('tank 4', { entry: 1, at: 0 }), readings: [{ entry: 1, at: 0, free_mg_L: 30 }, { entry: 3, at: 9, free_mg_L: 28 }] };
+ * freePoints(tank).length // => 2
+ * freePoints({ ...tank, additions: [{ entry: 2, at: 5, by: 1 }] }).length // => 1
+ * ```
+ */
+export function freePoints({ readings, additions, wine_since = -Infinity }: Vessel): readonly FreePoint[] {
+  const since = Math.max(wine_since, ...additions.map(({ at }) => at));
+  return readings.flatMap(({ at, free_mg_L }) =>
+    free_mg_L === undefined || at < since ? [] : [{ at, free_mg_L }],
+  );
+}
+
+/**
+ * Where the wine of a vessel lies: in a barrel by its name, in bottles by its stage, else in a tank.
+ *
+ * Range: any vessel, whatever its litres.
+ *
+ * @example
+ * ```ts
+ * import { freshVessel } from './fresh-vessel.ts';
+ * containerOf(freshVessel('barrel 17', { entry: 1, at: 0 })) // => 'barrel'
+ * ```
+ */
+export function containerOf({ vessel, traits }: Vessel): Container {
+  if (traits.stage?.value === 'bottled') return 'bottle';
+  return isBarrel(vessel) ? 'barrel' : 'tank';
+}
+
+/**
+ * When the free SO2 of a vessel falls below what it needs; times in milliseconds since 1970.
+ *
+ * @param needed_mg_L free SO2 that its pH asks for, mg/L, above 0
+ *
+ * Source: `forecast`.
+ *
+ * @example
+ * ```ts
+ * import { freshVessel } from './fresh-vessel.ts';
+ * forecastOf(freshVessel('tank 4', { entry: 1, at: 0 }), 25) // => { by: 'none', why: 'unmeasured' }
+ * ```
+ */
+export function forecastOf(vessel: Vessel, needed_mg_L: number): Forecast {
+  return forecast({ points: freePoints(vessel), needed_mg_L, container: containerOf(vessel) });
+}
