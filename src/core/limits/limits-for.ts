@@ -5,7 +5,7 @@ import type { LimitRow } from './limit-row.ts';
 import type { Limit, LimitNote, LimitsFound, NoLimit } from './limit.ts';
 import { notesOn } from './notes-on.ts';
 import { productsOf, rowsFor, rowsOfRegion } from './rows-for.ts';
-import { sugarFit } from './sugar-fits.ts';
+import { sugarFit, type SugarFit } from './sugar-fits.ts';
 
 /**
  * The limits of SO2 for a wine in a market, of total and of free apart; or why none is on file. What nobody said is
@@ -50,16 +50,25 @@ export interface Chosen {
   readonly atOpenEnd: boolean;
 }
 
+interface Fitting {
+  readonly row: LimitRow;
+  readonly fit: SugarFit;
+}
+
+/** Of the rows that the wine may fall under, what was opened before what is ordinary, then the least figure. */
 function strictest(rows: readonly LimitRow[], of: Limit['of'], facts: LimitFacts): Chosen | undefined {
   const isSweet = facts.category === 'sweet' || facts.designated_mg_L !== undefined;
   const fitting = rows
     .filter((row) => (row.of === 'free' ? 'free' : 'total') === of)
-    .map((row) => ({ row, fit: sugarFit(row.sugar, facts.sugar_g_L, isSweet) }));
-  const inBand = fitting.filter(({ fit }) => fit === 'in' || fit === 'unknown');
-  const taken = inBand.length > 0 ? inBand : fitting.filter(({ fit }) => fit === 'at-open-end');
-  const opened = taken.filter(({ row }) => replacesOrdinary(row));
-  const left = opened.length > 0 ? opened : taken;
-  const bySugar = left.filter(({ row, fit }) => row.sugar !== undefined && fit === 'in');
+    .map((row) => ({ row, fit: sugarFit(row.sugar, facts.sugar_g_L, isSweet) }))
+    .filter(({ fit }) => fit !== 'out');
+  const isIn = ({ fit }: Fitting): boolean => fit !== 'at-open-end';
+  const opened = fitting.filter(({ row }) => replacesOrdinary(row));
+  const openedIn = opened.filter(isIn);
+  const ordinaryIn = fitting.filter((one) => isIn(one) && !opened.includes(one));
+  const atEnds = ordinaryIn.length > 0 ? [...opened, ...ordinaryIn] : fitting;
+  const left = openedIn.length > 0 ? openedIn : atEnds;
+  const bySugar = left.filter(({ row, fit }) => row.sugar !== undefined && fit !== 'unknown');
   const [first] = (bySugar.length > 0 ? bySugar : left).toSorted((a, b) => byStrictness(a.row, b.row, facts));
   return first && { row: first.row, atOpenEnd: first.fit === 'at-open-end' };
 }

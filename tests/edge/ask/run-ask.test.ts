@@ -36,10 +36,13 @@ test('wrong options have status 2, a sentence for whoever runs it and nothing on
   expect(told.join('\n')).toContain('--colour');
 });
 
-test('an option that cannot be served yet is named, and the message is answered', async () => {
+test('the law of a market is served, and a market that is not on file is refused', async () => {
   const { status, out, told } = await ask(['--region', 'eu', 'hi']);
-  expect([status, told]).toEqual([0, ['--region is not served yet; it changes nothing.']]);
+  expect([status, told]).toEqual([0, []]);
   expect(out).toContain('Hello');
+  const refused = await ask(['--region', 'atlantis', 'hi']);
+  expect([refused.status, refused.out]).toEqual([2, '']);
+  expect(refused.told.join('\n')).toContain('--region must be one of oiv, eu, uk');
 });
 
 test('every line is answered in its order, a broken one in its place', async () => {
