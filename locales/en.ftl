@@ -315,11 +315,11 @@ choice-to =
         [unknown] { $mark } To { $free } ({ $molecular } molecular): { measured }; total unknown: measure it first
        *[known] { $mark } To { $free } ({ $molecular } molecular): { measured }
     }
-choice-no-amount = – To { $free } ({ $molecular } molecular): no amount: total would pass { $limit } (international code).
+choice-no-amount = – To { $free } ({ $molecular } molecular): no amount: total would pass { $limit } ({ law-of }).
 choice-red =
     { $kind ->
         [none] If it is red, { $red } takes { $free } free: nothing to add.
-        [over] If it is red, { $red } takes { $free } free: no amount, total would pass { $limit } (international code).
+        [over] If it is red, { $red } takes { $free } free: no amount, total would pass { $limit } ({ law-of }).
        *[other] If it is red, { $red } takes { $free } free: { bare-amount }.
     }
 ways-out = Or: colder, cleaner, checked more often; acid for a lower pH: ask someone qualified.
@@ -651,26 +651,65 @@ warning-stage-not-over =
 warning-additive-not-permitted =
     { $reason ->
         [ammonium] ⚠ Ammonium bisulfite is for grapes and must only (OIV): not for this wine; ask first.
-        [organic] ⚠ Organic wine takes SO2 and potassium salts only ({ $rule }): not this one. Ask first.
-        [organic-none] ⚠ Wine labelled organic in the US takes no added sulfite at all ({ $rule }). Ask first.
-       *[sodium] ⚠ Sodium metabisulfite: many rules bar it from wine (OIV; EU and UK unconfirmed). Ask first.
+        [organic] ⚠ Organic wine takes SO2 and potassium salts only ({ law-of }, Regulation 889/2008): not this one. Ask first.
+        [organic-none] ⚠ Wine labelled organic takes no added sulfite at all ({ law-of }, 7 CFR part 205). Ask first.
+       *[sodium] { warning-sodium }
+    }
+warning-sodium =
+    { $region ->
+        [oiv] ⚠ Sodium metabisulfite: many rules bar it from wine (OIV; EU and UK unconfirmed). Ask first.
+        [eu] ⚠ Sodium metabisulfite is not for wine in the EU, for equipment only (unconfirmed). Ask first.
+        [uk] ⚠ Sodium metabisulfite is not for wine in the UK, for equipment only (unconfirmed). Ask first.
+        [ar] ⚠ Sodium metabisulfite is not for wine in Argentina: potassium salts only (INV 281/85). Ask first.
+       *[other] ⚠ Sodium metabisulfite: no list for { law-of } was read, so unconfirmed; many rules bar it from wine. Ask first.
+    }
+refused-organic =
+    { $reason ->
+        [organic-none] { at }no sulfite: wine labelled organic takes none at all ({ law-of }, 7 CFR part 205).
+       *[organic] { at }not with { additive }: organic wine takes SO2 and potassium salts only ({ law-of }, Regulation 889/2008).
+    }
+refused-organic-instead =
+    { $reason ->
+        [organic-none] Not organic after all? Ask whoever answers for this wine; then: strike the entry that says so.
+       *[organic] Write it with kmbs instead. Not legal advice: confirm for your market.
+    }
+limit-doubt =
+    { $confidence ->
+        [unconfirmed] , unconfirmed: from memory
+       *[read] {""}
     }
 warning-total-over-limit =
     { $total ->
-        [known] ⚠ That would make total { $total_after_mg_L }, over { $limit_mg_L } { $unit } (international code); your country’s law decides: ask first.
-       *[at-least] ⚠ That would make total at least { $total_after_mg_L }, over { $limit_mg_L } { $unit } (international code); your country’s law decides: ask first.
+        [known] ⚠ That would make total { $total_after_mg_L }, over { $limit_mg_L } { $unit } ({ rule-short }{ limit-doubt }){ law-decides }: ask first.
+       *[at-least] ⚠ That would make total at least { $total_after_mg_L }, over { $limit_mg_L } { $unit } ({ rule-short }{ limit-doubt }){ law-decides }: ask first.
     }
-warning-free-over-limit = ⚠ Free could reach { $free_after_mg_L } if nothing binds, over the free limit { $limit_mg_L } { $unit } ({ $rule }): ask first.
-warning-label-threshold = ⚠ Label: total near { $threshold_mg_L } { $unit }, where the words about sulfites begin ({ $region }): confirm for your market.
+warning-free-over-limit = ⚠ Free could reach { $free_after_mg_L } if nothing binds, over the free limit { $limit_mg_L } { $unit } ({ rule-short }{ limit-doubt }){ law-decides }: ask first.
+warning-label-threshold =
+    ⚠ Label ({ law-of }): sulfites are named { $comparator ->
+        [more] above
+       *[from] from
+    } { $threshold_mg_L } { $unit_of_law }{ $counts ->
+        [added] {" "}added
+       *[total] {""}
+    }{ limit-doubt }; total would be { $total_after_mg_L }.
 warning-total-near-limit =
     { $total ->
-        [known] ⚠ Total would be { $total_after_mg_L } { $unit }, near the { $limit_mg_L } of the international code; your country’s law decides.
-       *[at-least] ⚠ Total would be at least { $total_after_mg_L } { $unit }, near the { $limit_mg_L } of the international code; your country’s law decides.
+        [known] ⚠ Total would be { $total_after_mg_L } { $unit }, near the limit { $limit_mg_L } ({ rule-short }{ limit-doubt }){ law-decides }.
+       *[at-least] ⚠ Total would be at least { $total_after_mg_L } { $unit }, near the limit { $limit_mg_L } ({ rule-short }{ limit-doubt }){ law-decides }.
     }
 warning-total-unknown = ⚠ The total is unknown: measure it.
 warning-total-unknown-half = ⚠ The total is unknown: measure it, free alone comes over half of the { $limit_mg_L } { $unit } limit.
-warning-no-limit-on-file = ⚠ I know no limit for such wine: look up your country’s law.
-warning-limit-unconfirmed = ⚠ The limit is unconfirmed: look up your country’s law.
+warning-total-unknown-most = ⚠ Total unknown: for this dose it may be { $most_total_mg_L } { $unit } at most today, limit { $limit_mg_L } ({ rule-short }). Measure it.
+warning-no-limit-on-file =
+    { $region ->
+        [oiv] ⚠ I know no limit for such wine: look up your country’s law.
+       *[other] ⚠ No limit on file for it ({ law-of }): look it up for your market.
+    }
+warning-limit-unconfirmed =
+    { $region ->
+        [oiv] ⚠ The limit is unconfirmed: look up your country’s law.
+       *[other] ⚠ Limit { $limit_mg_L } { $unit } { $of } ({ rule-short }): unconfirmed, from memory. Look it up for your market.
+    }
 warning-addition-large = ⚠ { $dose_mg_L } { $unit } at once is a lot: check the volume and its unit.
 warning-free-needed-high = ⚠ { $target_free_mg_L } { $unit } free is a lot: keep it colder, cleaner, checked more often; or a lower pH, with advice.
 warning-molecular-above-2 = ⚠ Above 2 { $unit } molecular SO2 is smelt and tasted.
@@ -732,6 +771,13 @@ help-wine-6 = T4 40 hl pH 3.5 free 18 +30% → more, for what binds; or: a third
 help-wine-7 = T4 40 hl pH 3.5 free 18, 10% kmbs → from a solution; also smbs, 6% so2, 5 g tabs
 help-wine-8 = 100 g kmbs in 20 hl → what an amount adds
 help-wine-9 = Red, rosé, sweet, cider, mead, organic; must, fermenting, ML done: say what it is, or the reply says what it took.
+help-solutions-1 = Solutions in water: none of them is a dose for wine, and nothing of them goes into the log.
+help-solutions-2 = make 5 L of 10% kmbs → a stock: what to weigh, how strong it is, mL for a barrel
+help-solutions-3 = make 1 L of 10% kmbs, add 30 ppm → the mL that take a 225 L barrel so far
+help-solutions-4 = 10 g kmbs in 100 mL water → how strong that is
+help-solutions-5 = holding solution 225 L → for an empty barrel; also: holding solution for 3 barrels
+help-solutions-6 = rinse 20 L → for clean equipment; of your own strength: rinse 20 L 1% kmbs
+help-solutions-7 = Burning discs or wicks: never a dose for wine, and no figures from me.
 help-log-1 = Nothing is deleted; corrections stand beside what they correct.
 help-log-2 = added 82 g kmbs T4 → noted; also ppm, mL, yesterday 17:00, lot 4471, note: …
 help-log-3 = T4 now free 28 total 96 → a reading kept, without a dose
@@ -888,7 +934,7 @@ more-head =
     }
 more-no-warnings = No further warnings.
 choice-left = { at }left as it is, { $molecular } molecular. Taste and measure often.
-choice-over = { at }no amount for that: total would pass { $limit } (international code).
+choice-over = { at }no amount for that: total would pass { $limit } ({ law-of }).
 round-choice = { at }pH { $ph } makes it a choice: send it alone.
 round-missing =
     { $field ->
@@ -968,7 +1014,7 @@ round-low = ⚠ Below 10 free much or all may bind: { $list }. There measure bef
 round-name = { $name }
 round-again = Send each line that could not be read again, whole.
 round-total =
-    In all { $list }, the sum of the { $count } rounded amounts.
+    In all { $list }: the { $count } rounded amounts added up.
 round-total-of =
     { $kind ->
         [tablet] { $amount } effervescent tablets of { $size } g SO2
@@ -1020,6 +1066,7 @@ sheet-vessel = Vessel
 sheet-volume = Volume L
 sheet-ph = pH
 sheet-free = Free SO2 mg/L
+sheet-free-short = free
 sheet-total = Total SO2 mg/L
 sheet-dose = SO2 to add mg/L
 sheet-weigh = Weigh g
@@ -1037,7 +1084,7 @@ sheet-title = Weigh-out sheet
 sheet-open = No amount:
 sheet-caution = Gloves, goggles, ventilate. Never lean into a tank. Mix, measure tomorrow.
 sheet-fetch = In all { $list }
-sheet-additive-name = { additive }
+sheet-additive-name = { round-percent } { additive }
 round-gone = No round is kept here: send it again.
 round-target-stage = { at }how many mg/L do you want to add?
 round-not-understood =
@@ -1280,7 +1327,16 @@ entry-vessel =
        *[some] { " " }{ $list }
     }
 entry-other = { $vessel } { $text } (not calculated)
-entry-stock = { $text }
+entry-stock =
+    { $event ->
+        [received] received
+        [used] used, for no wine:
+        [discarded] thrown away
+       *[counted] counted
+    } { $list }{ $supplier ->
+        [none] { "" }
+       *[other] { " " }from { $supplier }
+    }
 entry-correction =
     strikes { $entry }: { $reason ->
         [undo] taken back
@@ -1813,3 +1869,79 @@ question-no-sulfite-next = What it has: T4 pH 3.5 free 5
 question-bottling = Measure some days before; the last addition goes in before the line starts, mixed and measured.
 question-bottling-why = Each mg/L of oxygen picked up can take up to 4 mg/L of free SO2 (by formula).
 question-bottling-next = With its oxygen: bottling T4 40 hl pH 3.4 free 22 oxygen 2 mg/L
+
+## The chemical store
+stock-tablets =
+    { $unit ->
+        [tablet] { " " }tablet
+        [tablets] { " " }tablets
+       *[none] { "" }
+    }
+stock-of =
+    { additive }{ $strength ->
+        [none] { "" }
+       *[other] { " " }{ $strength } %
+    }{ $size ->
+        [none] { "" }
+       *[other] , { $size } g each
+    }
+stock-none = Nothing is noted in the chemical store yet. Tell what is there, or what came in: received 25 kg kmbs lot 4471 from Norte Supplies
+stock-none-of = No { additive } is noted in the chemical store. Tell what came in (received …), or count it (stock kmbs 3.2 kg).
+stock-shelf =
+    { stock-of }: { $amount }{ stock-tablets }{ $counted ->
+        [none] .
+       *[other] { " " }(counted { $counted }).
+    }
+stock-lot =
+    { "  " }{ $lot ->
+        [none] no lot
+       *[other] lot { $lot }
+    }: { $amount }{ stock-tablets }, in { $day }{ $supplier ->
+        [none] { "" }
+       *[other] { " " }from { $supplier }
+    }
+stock-negative = ⚠ { stock-of }: the log says { $amount }{ stock-tablets }: something was received that is not noted. Note it, or count: stock kmbs 3.2 kg
+stock-low = ⚠ Running low: { $amount }{ stock-tablets } { stock-of } left in store.
+stock-left = Left in store: { $amount }{ stock-tablets } { stock-of }.
+stock-short = ⚠ In store by the log: { $amount }{ stock-tablets } { stock-of }, less than this takes.
+stock-old = ⚠ In for over a year: an opened bag loses strength (common practice, no source). Measure free SO2 after it.
+stock-oldest-lot =
+    { $lot ->
+        [none] Taken from the oldest of several lots; else say the lot: added …, lot 4471
+       *[other] Taken from lot { $lot }, the oldest of several; else say the lot: added …, lot { $lot }
+    }
+stock-lot-unknown = Lot { $lot } is not in store by the log: taken from the oldest.
+stock-noted =
+    Noted { $entry }: { $event ->
+        [received] received
+        [used] used
+        [discarded] thrown away
+       *[counted] counted
+    } { $list }{ $supplier ->
+        [none] { "" }
+       *[other] { " " }from { $supplier }
+    }{ $purpose ->
+        [none] { "" }
+       *[other] { " " }({ $purpose })
+    }, { $when }.
+stock-corrected =
+    The log said { $was }: { $amount }{ stock-tablets } { $way ->
+        [more] more
+       *[less] less
+    } now.
+stock-not-kept = Nothing of it is noted in store yet, so nothing is drawn. Count it: stock kmbs 3.2 kg
+stock-lacks =
+    { $what ->
+        [additive] Which additive? Write it: received 25 kg kmbs; also smbs, 6% so2
+        [strength] Which strength has the { additive }? Write it: received 10 L of 6% so2
+        [size] Tablets of how many grams? Write it: received 50 tablets 5 g
+        [volume] Additions of { additive } are measured by volume. Write it in litres: received 10 L of 6% so2
+       *[amount] How much { additive }? Write it: received 25 kg kmbs
+    }
+help-stock-1 = Every addition draws on it, once something is in.
+help-stock-2 = received 25 kg kmbs lot 4471 from Norte Supplies → also 10 L of 6% so2
+help-stock-3 = stock → what is there, by lot; stock kmbs: one
+help-stock-4 = stock kmbs 3.2 kg → counted on the shelf: holds from then on
+help-stock-5 = used 200 g kmbs for rinsing → for no wine
+help-stock-6 = discarded 1 kg kmbs because caked → thrown away
+help-stock-7 = added 82 g kmbs T4 lot 4471 → from that lot; else the oldest

@@ -64,14 +64,14 @@ export const SOURCES = {
     read: true,
   },
   'food-additives-data-book': {
-    title: 'Food Additives Data Book, p. 780: potassium metabisulfite, solubility 25 %',
+    title: 'Food Additives Data Book, p. 780',
     read: true,
   },
   'encyclopedia-page': {
-    title: 'an encyclopedia page: potassium metabisulfite, 450 g/L at 20 °C',
+    title: 'an encyclopedia page',
     read: true,
   },
-  'sodium-data-sheet': { title: 'a supplier data sheet: sodium metabisulfite, 470 g/L at 25 °C', read: true },
+  'sodium-data-sheet': { title: 'a supplier data sheet of sodium metabisulfite', read: true },
   'us-24.246': { title: '27 CFR 24.246(a)(2), water used to dissolve additives (excerpt)', read: true },
   'icsc-sheets': { title: 'International Chemical Safety Cards 0074, 1134, 1175, 1254', read: true },
   'titration-general': {

@@ -8,6 +8,7 @@ for (const file of [
   'en-floor.jsonl',
   'en-words.jsonl',
   'en-marks.jsonl',
+  'en-solutions.jsonl',
   'refused.en.jsonl',
   'emergency.jsonl',
   'en-commands.jsonl',

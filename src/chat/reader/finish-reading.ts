@@ -49,6 +49,8 @@ function askAdditive({ marks }: Draft, fields: Fields, asks: Set<AskedField>): v
 function assumedVolume({ intent, marks }: Draft, fields: Fields): number | undefined {
   if (fields.volume_L !== undefined || marks.fruitByWeight || marks.casksWithoutSize || marks.eachOrTotal)
     return undefined;
+  // To rinse a barrel does not take a barrel full.
+  if (intent === 'solution' && marks.solutionUse === 'cleaning') return undefined;
   if (intent === 'reading' || (intent === 'added' && !marks.barrelsCounted)) return undefined;
   return marks.barrelsAssumed_L;
 }

@@ -1,5 +1,5 @@
 import type { Board } from './board.ts';
-import { findingOf, isFound, placeOf, termAt } from './board.ts';
+import { findingOf, holdsCue, isFound, placeOf, termAt } from './board.ts';
 import { alsoSaid } from './commands/also-said.ts';
 import { readOwn } from './commands/read-own.ts';
 import { draftOfBoard } from './draft-of-board.ts';
@@ -8,6 +8,7 @@ import { isForeignTalk } from './message-language.ts';
 import { decideIntent } from './refine/intent.ts';
 import { runFinders } from './run-finders.ts';
 import { isStranger } from './stranger.ts';
+import { readTitration } from './titration/read-titration.ts';
 import type { Draft } from './understood.ts';
 
 /** One numbered barrel without a size counts as a usual one. */
@@ -62,6 +63,8 @@ function noteUnread(board: Board, intent: Draft['intent']): void {
  */
 export function readDraft(board: Board, how: { readonly isNoTalk?: boolean } = {}): Draft {
   if (holdsTooMany(board)) return tooManyFigures(board);
+  const titration = readTitration(board);
+  if (titration) return titration;
   const own = how.isNoTalk ? undefined : readOwn(board);
   if (own) return own;
   runFinders(board);
@@ -73,6 +76,7 @@ export function readDraft(board: Board, how: { readonly isNoTalk?: boolean } = {
     board.notes.push({ id: 'mass-beside-readings', text: '' });
   if (board.marks.fruitByWeight) board.notes.push({ id: 'fruit-by-weight', text: '' });
   noteUnread(board, intent);
+  if (holdsCue(board, 'wick')) board.marks.wick = true;
   if (board.pieces.some(({ ids }) => ids.includes('if'))) board.marks.conditional = true;
   if (board.pieces.some(({ ids }) => ids.includes('acid'))) board.marks.acid = true;
   const toCome = board.pieces.find(({ ids }) => ids.includes('tomorrow') || ids.includes('next-week'));

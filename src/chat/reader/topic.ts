@@ -8,6 +8,7 @@ export function topicOf(board: Board): string | undefined {
   const marks = board.terms.filter(({ kind }) => kind !== 'break');
   if (marks.length > 0 && marks.every(({ text }) => text === '?' || text === '¿')) return 'help';
   if (board.message.trimStart().startsWith('/start') || holdsCue(board, 'help')) return 'help';
+  if (board.marks.wick) return 'burning-sulfur';
   const words = board.terms.filter(({ kind }) => kind === 'word').length;
   if (words === 0 && NOD.test(board.message)) return 'thanks';
   const greets = holdsCue(board, 'greeting') && words <= 6;

@@ -1,12 +1,13 @@
 import type { AdditiveId } from '../../core/additives/additive-id.ts';
 import type { Problem } from '../../core/problem.ts';
 import type { Command, SaidWhen } from './command.ts';
+import type { SaidTitration } from './titration/said-titration.ts';
 import type { Category, Product, Stage, Style, Target } from '../../core/wine.ts';
 
 /** The languages of the message language, by their ISO 639-1 codes. */
 export type Language = 'en' | 'es' | 'fr' | 'it' | 'de' | 'pt';
 
-/** What a person wants; `titration` is named by the message language and not read yet. */
+/** What a person wants. */
 export type Intent =
   'dose' | 'effect' | 'added' | 'reading' | 'solution' | 'titration' | 'command' | 'emergency' | 'chat';
 
@@ -187,6 +188,8 @@ export interface Reading {
   readonly concentrationUnit?: 'ppm' | 'mg/L' | 'g/hL';
   /** One of the bot's own words, or a statement about a vessel; only with the intent `command`. */
   readonly command?: Command;
+  /** What the burette gave; only with the intent `titration`. */
+  readonly titration?: SaidTitration;
   /** When it happened or was sampled, as it was said. */
   readonly when?: SaidWhen;
   /** The lot on the additive's label. */

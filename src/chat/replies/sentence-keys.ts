@@ -125,10 +125,10 @@ export interface SentenceValues {
   'choice-head': 'free' | 'ph' | 'target' | 'vessel';
   'choice-leave': 'free' | 'mark' | 'molecular';
   'choice-left': 'molecular' | 'vessel';
-  'choice-no-amount': 'free' | 'limit' | 'molecular';
-  'choice-over': 'limit' | 'vessel';
+  'choice-no-amount': 'free' | 'limit' | 'molecular' | 'region';
+  'choice-over': 'limit' | 'region' | 'vessel';
   'choice-powder': 'value';
-  'choice-red': 'amount' | 'count' | 'free' | 'kind' | 'limit' | 'red' | 'unit';
+  'choice-red': 'amount' | 'count' | 'free' | 'kind' | 'limit' | 'red' | 'region' | 'unit';
   'choice-tablet_SO2_g': 'value';
   'choice-tablet_salt_g': 'value';
   'choice-to':
@@ -220,7 +220,7 @@ export interface SentenceValues {
   'entry-order': 'added' | 'known' | 'list' | 'vessel';
   'entry-other': 'text' | 'vessel';
   'entry-reading': 'list' | 'vessel';
-  'entry-stock': 'text';
+  'entry-stock': 'event' | 'list' | 'supplier';
   'entry-vessel': 'event' | 'list' | 'lot' | 'to' | 'told' | 'until' | 'vessel' | 'whole';
   'errand-failed': never;
   'event-said': 'event' | 'lot' | 'to' | 'until' | 'whole';
@@ -372,6 +372,20 @@ export interface SentenceValues {
   'help-settings-6': never;
   'help-settings-7': never;
   'help-settings-8': never;
+  'help-solutions-1': never;
+  'help-solutions-2': never;
+  'help-solutions-3': never;
+  'help-solutions-4': never;
+  'help-solutions-5': never;
+  'help-solutions-6': never;
+  'help-solutions-7': never;
+  'help-stock-1': never;
+  'help-stock-2': never;
+  'help-stock-3': never;
+  'help-stock-4': never;
+  'help-stock-5': never;
+  'help-stock-6': never;
+  'help-stock-7': never;
   'help-topic': 'topic';
   'help-vessels-1': never;
   'help-vessels-10': never;
@@ -428,6 +442,7 @@ export interface SentenceValues {
   'left-unread': 'count';
   'limit-amount': 'additive' | 'amount' | 'count' | 'left' | 'unit' | 'volume';
   'limit-care': never;
+  'limit-doubt': 'confidence';
   'limit-is':
     'band' | 'class' | 'density' | 'high' | 'law_unit' | 'limit' | 'low' | 'of' | 'operator' | 'organic' | 'region' | 'unit' | 'uplift' | 'value' | 'vessel' | 'what' | 'written';
   'limit-none': 'product' | 'reason' | 'region' | 'vessel';
@@ -630,6 +645,8 @@ export interface SentenceValues {
   'recalled-allowance': 'percent';
   'refused-ammonium': 'vessel';
   'refused-ammonium-must': 'stage';
+  'refused-organic': 'additive' | 'reason' | 'region' | 'vessel';
+  'refused-organic-instead': 'reason';
   remind: 'list';
   'remind-late': 'vessel';
   'remind-set': 'vessel' | 'when';
@@ -713,7 +730,7 @@ export interface SentenceValues {
   'setting-zone': 'zone';
   'settings-head': never;
   'sheet-additive': never;
-  'sheet-additive-name': 'additive';
+  'sheet-additive-name': 'additive' | 'strength';
   'sheet-after': never;
   'sheet-caution': never;
   'sheet-done': never;
@@ -721,6 +738,7 @@ export interface SentenceValues {
   'sheet-entry': 'entry' | 'late' | 'list' | 'noted' | 'struck' | 'when' | 'who';
   'sheet-fetch': 'list';
   'sheet-free': never;
+  'sheet-free-short': never;
   'sheet-in-all': never;
   'sheet-limit': never;
   'sheet-measure': never;
@@ -803,7 +821,24 @@ export interface SentenceValues {
   'step-titrant-used': never;
   'step-volume-in-litres': never;
   'still-asked': never;
+  'stock-corrected': 'amount' | 'unit' | 'was' | 'way';
+  'stock-lacks': 'additive' | 'what';
+  'stock-left': 'additive' | 'amount' | 'size' | 'strength' | 'unit';
+  'stock-lot': 'amount' | 'day' | 'lot' | 'supplier' | 'unit';
+  'stock-lot-unknown': 'lot';
+  'stock-low': 'additive' | 'amount' | 'size' | 'strength' | 'unit';
   'stock-name': 'named';
+  'stock-negative': 'additive' | 'amount' | 'size' | 'strength' | 'unit';
+  'stock-none': never;
+  'stock-none-of': 'additive';
+  'stock-not-kept': never;
+  'stock-noted': 'entry' | 'event' | 'list' | 'purpose' | 'supplier' | 'when';
+  'stock-of': 'additive' | 'size' | 'strength';
+  'stock-old': never;
+  'stock-oldest-lot': 'lot';
+  'stock-shelf': 'additive' | 'amount' | 'counted' | 'size' | 'strength' | 'unit';
+  'stock-short': 'additive' | 'amount' | 'size' | 'strength' | 'unit';
+  'stock-tablets': 'unit';
   stranger: never;
   'strike-again': 'by' | 'entry';
   'strike-correction': 'entry';
@@ -845,26 +880,34 @@ export interface SentenceValues {
   'vessels-none': never;
   'volume-differs': 'known' | 'said' | 'vessel' | 'written';
   'warning-addition-large': 'dose_mg_L' | 'unit';
-  'warning-additive-not-permitted': 'reason' | 'rule';
+  'warning-additive-not-permitted': 'reason' | 'region';
   'warning-already-dosed': never;
   'warning-basis-fallback': never;
   'warning-basis-fallback-change':
     'change' | 'compared_at_alcohol_percent' | 'compared_at_temperature_C' | 'direction' | 'unit';
   'warning-free-low-may-bind-all': never;
   'warning-free-needed-high': 'target_free_mg_L' | 'unit';
-  'warning-free-over-limit': 'free_after_mg_L' | 'limit_mg_L' | 'rule' | 'unit';
-  'warning-label-threshold': 'region' | 'threshold_mg_L' | 'unit';
-  'warning-limit-unconfirmed': never;
+  'warning-free-over-limit':
+    'band' | 'class' | 'confidence' | 'free_after_mg_L' | 'high' | 'limit_mg_L' | 'low' | 'organic' | 'region' | 'unit' | 'what';
+  'warning-label-threshold':
+    'comparator' | 'confidence' | 'counts' | 'region' | 'threshold_mg_L' | 'total_after_mg_L' | 'unit_of_law';
+  'warning-limit-unconfirmed':
+    'band' | 'class' | 'high' | 'limit_mg_L' | 'low' | 'of' | 'organic' | 'region' | 'unit' | 'what';
   'warning-molecular-above-2': 'unit';
   'warning-no-dose-at-this-stage': 'stage';
-  'warning-no-limit-on-file': never;
+  'warning-no-limit-on-file': 'region';
   'warning-ph-unusual': 'ph';
   'warning-rounding-coarse': 'rounding_mg_L' | 'unit';
+  'warning-sodium': 'region';
   'warning-stage-not-over': 'stage';
-  'warning-total-near-limit': 'limit_mg_L' | 'total' | 'total_after_mg_L' | 'unit';
-  'warning-total-over-limit': 'limit_mg_L' | 'total' | 'total_after_mg_L' | 'unit';
+  'warning-total-near-limit':
+    'band' | 'class' | 'confidence' | 'high' | 'limit_mg_L' | 'low' | 'organic' | 'region' | 'total' | 'total_after_mg_L' | 'unit' | 'what';
+  'warning-total-over-limit':
+    'band' | 'class' | 'confidence' | 'high' | 'limit_mg_L' | 'low' | 'organic' | 'region' | 'total' | 'total_after_mg_L' | 'unit' | 'what';
   'warning-total-unknown': never;
   'warning-total-unknown-half': 'limit_mg_L' | 'unit';
+  'warning-total-unknown-most':
+    'band' | 'class' | 'high' | 'limit_mg_L' | 'low' | 'most_total_mg_L' | 'organic' | 'region' | 'unit' | 'what';
   'ways-out': never;
   weigh: 'vessel';
   'when-future': 'text' | 'vessel' | 'when';

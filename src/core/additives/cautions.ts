@@ -17,6 +17,7 @@ export const CAUTION_IDS = [
   'never-lean-in',
   'gloves-goggles',
   'no-acid-no-chlorine',
+  'no-other-acid-no-chlorine',
   'asthma',
   'crush-first',
   'dissolve-first',
@@ -50,6 +51,9 @@ const CAUTIONS: Readonly<Record<AdditiveId, readonly CautionId[]>> = {
   tablet: DISSOLVED,
 };
 
+/** Where an additive goes. */
+export type CautionUse = 'wine' | 'water' | 'water-with-acid';
+
 /** What only wine asks for: a stock in water neither foams nor is measured again. */
 const IN_WINE_ONLY: readonly CautionId[] = [
   'grapes-and-must-only',
@@ -62,7 +66,7 @@ const IN_WINE_ONLY: readonly CautionId[] = [
 /**
  * The cautions that go with an additive, in the order to show them.
  *
- * @param use where it goes: into wine, or into water for a stock
+ * @param use where it goes: into wine, into water for a stock, or into water with citric acid
  * @param asTablets whether it comes as small plain tablets, which are crushed and then dissolved
  *
  * @example
@@ -74,9 +78,12 @@ const IN_WINE_ONLY: readonly CautionId[] = [
  */
 export function cautionsOf(
   id: AdditiveId,
-  use: 'wine' | 'water' = 'wine',
+  use: CautionUse = 'wine',
   asTablets = false,
 ): readonly CautionId[] {
-  const all = CAUTIONS[id].map((one) => (one === 'dissolve-first' && asTablets ? 'crush-first' : one));
+  const all = CAUTIONS[id].map((one) => {
+    if (one === 'no-acid-no-chlorine' && use === 'water-with-acid') return 'no-other-acid-no-chlorine';
+    return one === 'dissolve-first' && asTablets ? 'crush-first' : one;
+  });
   return use === 'wine' ? all : all.filter((one) => !IN_WINE_ONLY.includes(one));
 }

@@ -1,15 +1,19 @@
 import type { AdditiveAtHand } from '../additives/additive-id.ts';
 import { ADDITIVES } from '../additives/additives.ts';
 import { SO2ContentOf, SO2Per } from '../additives/so2-content.ts';
+import { dissolves, SOLUBILITIES, type SolublePowder } from '../additives/solubility.ts';
 import { SO2In } from '../additives/so2-in.ts';
 import { assertWithinBounds } from '../bounds.ts';
+import type { StepName } from '../step-names.ts';
 import { shown } from '../units/shown.ts';
 import { over, times } from '../working.ts';
-import type { SolutionAnswer } from './answer.ts';
+import type { SolubilityNote, SolutionAnswer } from './answer.ts';
 import { effectSteps } from './effect-steps.ts';
 import { line, printAlike, withEnoughDigits } from './line.ts';
+import { recipeSolution } from './recipe-solution.ts';
 import type { SolutionRequest } from './request.ts';
 import { measureOf, toStep } from './rounding.ts';
+import { stockPerBarrel } from './stock-per-barrel.ts';
 import { number } from './terms.ts';
 import { volumeInLitres } from './volume-in-litres.ts';
 
@@ -90,12 +94,13 @@ function byAmount(request: SolutionRequest, additive: AdditiveAtHand): SolutionA
 /**
  * A stock in water: what to weigh and fill up to the volume, and its strength in grams of SO2 per 100 mL; or, where
  * it is said what goes in, the strength that this gives. Only metabisulfite is weighed; of other solutions the answer
- * is the strength alone; where neither strength nor amount is known, no figure.
+ * is the strength alone; where neither strength nor amount is known, no figure. More than surely dissolves gets no
+ * figure either. A holding solution or a rinse without strength and amount is made by the usual recipe.
  *
  * @param request volume in L; additive with its strength (grams per 100 mL), or a mass in g, or mL of a stronger solution
  * @throws RangeError for figures outside `BOUNDS`
  *
- * Source: shares of SO2 from `additives`.
+ * Source: shares of SO2 from `additives`; `SOLUBILITIES`; `SOLUTION_RECIPES`.
  *
  * @example
  * ```ts
@@ -107,9 +112,66 @@ export function solution(request: SolutionRequest): SolutionAnswer {
   assertWithinBounds('make up a solution', 'volume_L', request.volume_L);
   assertWithinBounds('make up a solution', 'mass_g', request.mass_g);
   assertWithinBounds('make up a solution', 'additive_volume_mL', request.additive_volume_mL);
-  const { additive, mass_g, additive_volume_mL } = request;
-  if (mass_g === undefined && additive_volume_mL === undefined) return byStrength(request);
-  return byAmount(request, weighed(additive, mass_g));
+  assertWithinBounds('make up a solution', 'temperature_C', request.temperature_C);
+  const { additive, mass_g, additive_volume_mL, use } = request;
+  const isByAmount = mass_g !== undefined || additive_volume_mL !== undefined;
+  if (use !== undefined && !isByAmount && additive.strength_percent === undefined)
+    return recipeSolution(request, use);
+  const answer = isByAmount ? byAmount(request, weighed(additive, mass_g)) : byStrength(request);
+  const powder = powderOf(additive);
+  const solubility = powder === undefined ? undefined : solubilityOf(powder, answer, request.temperature_C);
+  if (solubility?.says === 'too-much') return { volume_L: request.volume_L, solubility, steps: [] };
+  return {
+    ...answer,
+    ...(use === undefined ? ofStock(answer, request) : { use }),
+    ...(solubility === undefined ? {} : { solubility }),
+  };
+}
+
+/** The lines that print how strong a stock is; of 100 mL it is the SO2 that goes in. */
+const STRENGTH_LINES: readonly StepName[] = [
+  'solution-strength-by-salt',
+  'solution-strength',
+  'so2-in-amount',
+];
+
+/** How long a stock may be trusted, and what it brings into a barrel; nothing where it is not known how strong it is. */
+function ofStock(answer: SolutionAnswer, { rise_mg_L }: SolutionRequest): Partial<SolutionAnswer> {
+  const { strength_SO2_g_per_100_mL: strength } = answer;
+  const isMade = answer.salt_g !== undefined || answer.additive_volume_mL !== undefined;
+  if (!isMade || strength === undefined || strength <= 0) return {};
+  const printed_g = answer.steps.find(({ name }) => STRENGTH_LINES.includes(name))?.result.value;
+  return { keeps: 'days-to-weeks', per_barrel: stockPerBarrel(strength, { rise_mg_L, printed_g }) };
+}
+
+/** The powder of which a stock is made. */
+function powderOf({ id }: AdditiveAtHand): SolublePowder | undefined {
+  const isPotassium = id === 'potassium-metabisulfite' || id === 'potassium-metabisulfite-solution';
+  if (isPotassium) return 'potassium-metabisulfite';
+  const isSodium = id === 'sodium-metabisulfite' || id === 'sodium-metabisulfite-solution';
+  return isSodium ? 'sodium-metabisulfite' : undefined;
+}
+
+/** That so much salt does not surely dissolve, or that no figure is known for water so cold. */
+function solubilityOf(
+  powder: SolublePowder,
+  { salt_g, volume_L }: SolutionAnswer,
+  temperature_C: number | undefined,
+): SolubilityNote | undefined {
+  if (salt_g === undefined) return undefined;
+  const salt_g_per_L = salt_g / volume_L;
+  const published = SOLUBILITIES[powder];
+  const { at_C } = published[0];
+  const values = {
+    salt_g_per_L,
+    least_g_per_L: published[0].salt_g_per_L,
+    most_g_per_L: published.at(-1)?.salt_g_per_L ?? published[0].salt_g_per_L,
+    at_C,
+    ...(temperature_C === undefined ? {} : { temperature_C }),
+  };
+  if (!dissolves(powder, salt_g_per_L, temperature_C)) return { says: 'too-much', ...values };
+  if (temperature_C === undefined || temperature_C >= at_C) return undefined;
+  return { says: 'unknown-when-colder', ...values };
 }
 
 /** Grams beside a metabisulfite "solution" are grams of the powder that goes in. */

@@ -8,6 +8,7 @@ export const SHOWN_UNITS = {
   mg: GRAMS_IN.mg * 1000,
   g: 1000,
   'mg/L': 1,
+  'g/L': 1000,
   ...LITRES_IN,
 } as const;
 /** A unit that a working may show; `""` for a pure number. */

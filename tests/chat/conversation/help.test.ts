@@ -1,6 +1,6 @@
 import { describe, expect, test } from 'vitest';
 import { HELP_KEYS } from '../../../src/chat/replies/help-keys.ts';
-import { READ_IN_FULL } from '../../../src/chat/reader/words/read-in-full.ts';
+import { en } from '../../../src/chat/reader/words/en.ts';
 import { startTalk, textOf } from './talk.ts';
 
 const TOPICS = Object.keys(HELP_KEYS);
@@ -17,7 +17,7 @@ describe.each(TOPICS)('help %s', (topic) => {
     const text = textOf(await startTalk().write(`help ${topic}`));
     expect(text.split('\n')[0]).not.toBe('Send a reading, get the SO2 addition.');
     expect(rowsOf(text)).toBeLessThanOrEqual(25);
-    expect(READ_IN_FULL.every(({ topics }) => Object.keys(topics ?? {}).includes(topic))).toBe(true);
+    expect(Object.keys(en.topics ?? {})).toContain(topic);
   });
 
   test('what it suggests to send is understood when it is sent', async () => {

@@ -50,7 +50,15 @@ const questionLines = (topic: QuestionId): Line[] => [
   line('first', `question-${topic}-next`),
 ];
 
+/** What has to be known of sulfur that is burnt, wherever it comes up. */
+export const BURNING_SULFUR = [
+  'burning-sulfur-never',
+  'burning-sulfur-danger',
+  'burning-sulfur-rather',
+] as const;
+
 function linesFor(reading: Reading): Line[] {
+  if (reading.topic === 'burning-sulfur') return BURNING_SULFUR.map((key) => line('first', key));
   if (isQuestion(reading.topic)) return questionLines(reading.topic);
   const isHelp = reading.intent === 'chat' && reading.topic?.startsWith('help') === true;
   if (!isHelp) return keysFor(reading).map((key) => line('first', key));

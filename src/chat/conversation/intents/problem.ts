@@ -2,6 +2,7 @@ import type { Reading } from '../../reader/understood.ts';
 import { doubtOf } from '../doubt.ts';
 import { line } from '../lines/line.ts';
 import { problemLines, shortened } from '../lines/problems.ts';
+import { BURNING_SULFUR } from './chat.ts';
 import { vesselText } from '../lines/vessel.ts';
 import type { Outcome, Turn } from '../outcome.ts';
 
@@ -10,11 +11,20 @@ function wordsOf(about: string, reading: Reading): string {
   return about.trim() === '' ? vesselText(reading) : shortened(about);
 }
 
+/** A stock of powder whose strength no water takes. */
+function isOfTooStrongStock({ marks, problems, fields }: Reading): boolean {
+  const isOfPowder = fields.additive === undefined || fields.additive.includes('metabisulfite');
+  return marks.solutionUse !== undefined && isOfPowder && problems[0]?.code === 'strength-out-of-range';
+}
+
 /** A message with something wrong in it: what, and what to send instead; never a figure beside it. */
 export function answerProblem(reading: Reading, { manner }: Turn): Outcome {
   const doubt = doubtOf(reading);
   const again = doubt === undefined ? 'whole' : 'correction';
-  const lines = problemLines(reading, vesselText(reading), manner.mark, again);
+  const lines = reading.marks.wick
+    ? BURNING_SULFUR.map((key) => line('first', key))
+    : problemLines(reading, vesselText(reading), manner.mark, again);
+  if (isOfTooStrongStock(reading)) lines.splice(0, 1, line('first', 'solution-strengths'));
   const unread = reading.problems.find(({ code }) => code === 'not-understood');
   const inRound = unread
     ? [line('first', 'round-not-understood', { about: wordsOf(unread.about, reading) })]

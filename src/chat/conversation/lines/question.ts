@@ -29,6 +29,7 @@ function questionOf(
 ): Omit<Line, 'room'> {
   if (field === 'volume_L') {
     if (noteText(reading, 'fruit-by-weight') !== undefined) return { key: 'ask-fruit', values: {} };
+    if (reading.intent === 'solution') return { key: 'ask-solution-volume', values: { use: useOf(reading) } };
     const { volumeChoices: [said_L, known_L] = [] } = reading.marks;
     if (said_L !== undefined) return whichVolume(said_L, known_L, manner);
     return { key: 'ask-volume_L', values: { unit: settings.volumeUnit, count: countText(reading) } };
@@ -41,6 +42,11 @@ function questionOf(
   if (field === 'strength_percent')
     return { key: 'ask-strength_percent', values: { named: reading.fields.additive ?? 'other' } };
   return { key: `ask-${field}`, values: { unit: manner.unit } };
+}
+
+function useOf({ marks: { solutionUse } }: Reading): string {
+  if (solutionUse === 'cleaning') return 'rinse';
+  return solutionUse === 'holding' ? 'holding' : 'stock';
 }
 
 /** A volume that is far from the one known, or more than the vessel holds. */

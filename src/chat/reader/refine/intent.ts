@@ -21,13 +21,23 @@ const isNegated = (board: Board): boolean => board.notes.some(({ id }) => id ===
 const refused = (board: Board, code: string): boolean =>
   board.problems.some((problem) => problem.code === code);
 
+/** `rinse T4`: a vessel is to be cleaned, and nothing goes into its wine. */
+const opensWithCleaning = (board: Board): boolean =>
+  isCue(board, 0, 'cleaning') && hasVessel(board) && board.terms.length <= 5;
+
 /** A solution in water: never a dose for wine. */
 function isSolution(board: Board): boolean {
   const { solutionUse } = board.marks;
   if (solutionUse === undefined) return false;
   if (solutionUse === 'holding') return true;
   if (solutionUse === 'cleaning')
-    return hasVolume(board) || hasAdditive(board) || hasAmount(board) || any(board, 'strength_percent');
+    return (
+      hasVolume(board) ||
+      hasAdditive(board) ||
+      hasAmount(board) ||
+      any(board, 'strength_percent') ||
+      opensWithCleaning(board)
+    );
   const dissolved =
     findingOf(board, 'additive')?.value.endsWith('-solution') === true || any(board, 'strength_percent');
   const inWater = holdsCue(board, 'water');

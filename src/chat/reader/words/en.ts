@@ -567,6 +567,17 @@ export const en: Words = {
     lab: ['lab', 'laboratory', 'titration', 'titrations', 'burette', 'ripper', 'aeration', 'analysis'],
   },
   own: {
+    'lab-aeration': ['ao', 'a o', 'aeration', 'aeration oxidation', 'aspiration', 'aspiration method'],
+    'lab-iodine': ['ripper', 'ripper titration', 'iodine', 'iodometric', 'iodimetric', 'iodine titration'],
+    'lab-naoh': ['naoh', 'sodium hydroxide', 'caustic soda'],
+    'lab-iodate': ['iodate', 'kio3', 'potassium iodate'],
+    'lab-titration': ['titration', 'titrated', 'titrate', 'titrating'],
+    'lab-sample': ['sample', 'samples', 'wine sample', 'aliquot', 'pipette', 'pipetted'],
+    'lab-titrant': ['titrant', 'burette', 'buret', 'used', 'consumed', 'titre', 'titer'],
+    'lab-blank': ['blank'],
+    'lab-ascorbic': ['ascorbic', 'ascorbic acid', 'vitamin c'],
+    'lab-normal': ['n', 'normal', 'normality'],
+    'lab-molar': ['m', 'molar', 'molarity'],
     filler: [
       'please', 'pls', 'plz', 'thanks', 'thank you', 'thx', 'hi', 'hello', 'hey', 'ok', 'okay', 'bot', 'the', 'a', 'an', 'my',
       'our', 'me', 'us', 'can you', 'could you', 'would you', 'will you', 'can i', 'can we', 'can i see', 'i want', 'i want to see',

@@ -1,0 +1,43 @@
+import { readFileSync } from 'node:fs';
+import { Readable, PassThrough } from 'node:stream';
+import { expect, test } from 'vitest';
+import { runAsk } from '../../../src/edge/ask/run-ask.ts';
+
+/** The blocks of `jsonl` in the README: a line in, and below it part of the line that comes out, as often as it likes. */
+const PAIRS = [...readFileSync('README.md', 'utf8').matchAll(/```jsonl( [^\n]*)?\n([\s\S]*?)```/g)].flatMap(
+  ([, options = '', block = '']) => {
+    const lines = block.trim().split('\n');
+    return lines.flatMap((line, at) =>
+      at % 2 === 0 ? [{ options: options.trim(), line, shown: lines[at + 1] ?? '' }] : [],
+    );
+  },
+);
+
+/** What is shown, with each figure as one that agrees to the digits it shows. */
+function expected(text: string): unknown {
+  const marked = text.replaceAll(/(?<=[:[,] ?)-?\d+(\.\d+)?(?=[,}\]])/g, (figure) => `"#${figure}"`);
+  return JSON.parse(marked, (_, value: unknown) => {
+    const [, figure] = typeof value === 'string' ? (/^#(.+)$/.exec(value) ?? []) : [];
+    if (figure === undefined) return value;
+    const decimals = figure.split('.')[1]?.length ?? 0;
+    return decimals === 0 ? Number(figure) : expect.closeTo(Number(figure), decimals);
+  });
+}
+
+async function ask(args: readonly string[], input: string): Promise<string> {
+  const output = new PassThrough({ encoding: 'utf8' });
+  let out = '';
+  output.on('data', (chunk) => (out += String(chunk)));
+  const now = (): number => Date.parse('2026-10-05T12:00:00Z');
+  await runAsk({ args, input: Readable.from([input]), output, tell: () => undefined, now });
+  return out;
+}
+
+test('the README has examples for scripts', () => {
+  expect(PAIRS.length).toBeGreaterThan(1);
+});
+
+test.each(PAIRS)('README: $line', async ({ options, line, shown }) => {
+  const args = ['--jsonl', ...options.split(' ').filter(Boolean)];
+  expect(JSON.parse(await ask(args, `${line}\n`))).toMatchObject(expected(shown) as object);
+});
