@@ -20,7 +20,7 @@ function expected(text: string): unknown {
     const [, figure] = typeof value === 'string' ? (/^#(.+)$/.exec(value) ?? []) : [];
     if (figure === undefined) return value;
     const decimals = figure.split('.')[1]?.length ?? 0;
-    return decimals === 0 ? Number(figure) : expect.closeTo(Number(figure), decimals);
+    return expect.closeTo(Number(figure), decimals === 0 ? 9 : decimals);
   });
 }
 
