@@ -778,6 +778,13 @@ help-solutions-4 = 10 g kmbs in 100 mL water → how strong that is
 help-solutions-5 = holding solution 225 L → for an empty barrel; also: holding solution for 3 barrels
 help-solutions-6 = rinse 20 L → for clean equipment; of your own strength: rinse 20 L 1% kmbs
 help-solutions-7 = Burning discs or wicks: never a dose for wine, and no figures from me.
+help-stock-1 = Every addition draws on it, once something is in.
+help-stock-2 = received 25 kg kmbs lot 4471 from Norte Supplies → also 10 L of 6% so2
+help-stock-3 = stock → what is there, by lot; stock kmbs: one
+help-stock-4 = stock kmbs 3.2 kg → counted on the shelf: holds from then on
+help-stock-5 = used 200 g kmbs for rinsing → for no wine
+help-stock-6 = discarded 1 kg kmbs because caked → thrown away
+help-stock-7 = added 82 g kmbs T4 lot 4471 → from that lot; else the oldest
 help-log-1 = Nothing is deleted; corrections stand beside what they correct.
 help-log-2 = added 82 g kmbs T4 → noted; also ppm, mL, yesterday 17:00, lot 4471, note: …
 help-log-3 = T4 now free 28 total 96 → a reading kept, without a dose
@@ -1907,8 +1914,8 @@ stock-short = ⚠ In store by the log: { $amount }{ stock-tablets } { stock-of }
 stock-old = ⚠ In for over a year: an opened bag loses strength (common practice, no source). Measure free SO2 after it.
 stock-oldest-lot =
     { $lot ->
-        [none] Taken from the oldest of several lots; else say the lot: added …, lot 4471
-       *[other] Taken from lot { $lot }, the oldest of several; else say the lot: added …, lot { $lot }
+        [none] Taken from the oldest of several; else say the lot: added …, lot { $other }
+       *[other] Taken from lot { $lot }, the oldest of several; else say it: added …, lot { $other }
     }
 stock-lot-unknown = Lot { $lot } is not in store by the log: taken from the oldest.
 stock-noted =
@@ -1938,10 +1945,54 @@ stock-lacks =
         [volume] Additions of { additive } are measured by volume. Write it in litres: received 10 L of 6% so2
        *[amount] How much { additive }? Write it: received 25 kg kmbs
     }
-help-stock-1 = Every addition draws on it, once something is in.
-help-stock-2 = received 25 kg kmbs lot 4471 from Norte Supplies → also 10 L of 6% so2
-help-stock-3 = stock → what is there, by lot; stock kmbs: one
-help-stock-4 = stock kmbs 3.2 kg → counted on the shelf: holds from then on
-help-stock-5 = used 200 g kmbs for rinsing → for no wine
-help-stock-6 = discarded 1 kg kmbs because caked → thrown away
-help-stock-7 = added 82 g kmbs T4 lot 4471 → from that lot; else the oldest
+
+# The laboratory: what a titration comes to
+
+titration-result = { $vessel ->
+    [none] { $of ->
+        [total] Total
+       *[other] Free
+    } SO2 { $result } { $unit }
+   *[other] { $vessel }: { $of ->
+        [total] total
+       *[other] free
+    } SO2 { $result } { $unit }
+}, by { $method ->
+    [aeration] aeration–oxidation
+   *[other] iodine
+}.
+titration-molar = { $molar } M iodine is { $normal } N: one mole takes up twice.
+titration-ascorbic-asked = Iodine counts ascorbic acid too: { $amount } mg/L of it reads as +{ $counts } { $unit }. If there is any, add “ascorbic { $amount }”.
+titration-precision = Two results of one wine may differ by { $again } in one lab, by { $other } between two (published).
+titration-red-high = A red: acidified methods read free SO2 high, in one study by up to 66 %. Nothing is taken off; use one method throughout.
+titration-name-vessel = To keep it as a reading, put the vessel in front: T4 …
+titration-read = Read: { $list }.
+titration-sample = sample { $volume } mL
+titration-titrant = titrant { $volume } mL
+titration-blank = blank { $volume } mL
+titration-strength = { $unit ->
+    [none] { $strength }
+   *[other] { $strength } { $unit }
+}
+titration-iodate = { $mass } mg iodate in { $volume } mL
+titration-ascorbic = ascorbic acid { $amount } mg/L
+titration-free-assumed = Taken as free SO2; write “total” if the sample was prepared for the total.
+titration-no-blank = No blank taken off; add “blank 0.1” if you ran one.
+titration-asks = { $missing ->
+    [method] Titrated with sodium hydroxide (AO) or with iodine? Write it in: AO 20 mL sample, 1.9 mL 0.01 N
+    [sample] How many mL of wine? Send it whole: { $method ->
+        [iodine] iodine 25 mL sample, 1.4 mL 0.02 N
+       *[other] AO 20 mL sample, 1.9 mL 0.01 N
+    }
+    [titrant] How many mL from the burette? Send it whole: { $method ->
+        [iodine] iodine 25 mL sample, 1.4 mL 0.02 N
+       *[other] AO 20 mL sample, 1.9 mL 0.01 N
+    }
+    [unit] Is the iodine in N or in M? One is half the other. Write N or M behind its strength.
+   *[strength] How strong is the titrant? Send it whole, with N or M: { $method ->
+        [iodine] iodine 25 mL sample, 1.4 mL 0.02 N
+       *[other] AO 20 mL sample, 1.9 mL 0.01 N
+    }
+}
+titration-either = { $strength } N gives { $normal } { $unit }, { $strength } M gives { $molar } { $unit }.
+button-keep-result = Keep it

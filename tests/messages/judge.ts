@@ -13,10 +13,11 @@ export interface Expected {
   readonly when?: unknown;
   readonly chemical_lot?: string;
   readonly remark?: string;
+  readonly titration?: unknown;
 }
 
 /** What stands beside the fields of a reading, and is compared where a file of labels is about it. */
-const BESIDE = ['command', 'when', 'chemical_lot', 'remark'] as const;
+const BESIDE = ['command', 'when', 'chemical_lot', 'remark', 'titration'] as const;
 
 /** One labelled message: a single reading, or a round with what its first line shares. */
 export interface Labelled {

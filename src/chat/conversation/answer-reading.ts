@@ -10,6 +10,7 @@ import { answerOtherAddition } from './intents/other-addition.ts';
 import { answerProblem } from './intents/problem.ts';
 import { answerReading as answerKeptReading } from './intents/reading.ts';
 import { answerSolution } from './intents/solution.ts';
+import { answerTitration } from './intents/titration.ts';
 import { whenIsUnclear } from './intents/when-unclear.ts';
 import { line } from './lines/line.ts';
 import type { Outcome, Turn } from './outcome.ts';
@@ -41,7 +42,9 @@ function saysSomething({ lines, inRound }: Outcome): boolean {
 /** A sample that is still to be taken tells nothing; of a dose for tomorrow only its own hour counts. */
 function sampledWhen(reading: Reading, turn: Turn): Outcome | undefined {
   const isOfSample =
-    reading.intent === 'reading' || (reading.intent === 'dose' && reading.when !== undefined);
+    reading.intent === 'reading' ||
+    reading.intent === 'titration' ||
+    (reading.intent === 'dose' && reading.when !== undefined);
   return isOfSample ? whenIsUnclear(reading, turn) : undefined;
 }
 
@@ -63,8 +66,9 @@ function answerByIntent(reading: Reading, language: Language, turn: Turn): Outco
       return answerSolution(reading, turn);
     case 'command':
       return answerStatement(reading, turn) ?? answerOrdered(reading, turn);
-    case 'chat':
     case 'titration':
+      return answerTitration(reading, turn);
+    case 'chat':
       return answerChat(reading);
   }
 }

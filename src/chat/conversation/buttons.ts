@@ -11,7 +11,7 @@ import { letterAt } from './waiting.ts';
 /** What a button does to a reading; its key is `does:ref`, of a choice `does:ref:which`. */
 export type Does =
   | 'w' | 's' | 't' | 'm' | 'nf' | 'red' | 'white' | 'c' | 'l'
-  | 'a' | 'y' | 'o' | 'n' | 'i' | 'gb' | 'ga' | 'gd'; // prettier-ignore
+  | 'k' | 'f' | 'fy' | 'a' | 'y' | 'o' | 'n' | 'i' | 'gb' | 'ga' | 'gd'; // prettier-ignore
 
 /** What a button does to an entry of the log; its key is `does:entry`. */
 export type DoesToEntry = 'u' | 'd' | 'r';
@@ -21,7 +21,10 @@ const MOST_BUTTONS = { vessel: 6, none: 4 } as const;
 
 /** What stands on a button, by what it does. */
 export const LABELS = {
+  k: 'button-keep-result',
   a: 'button-added',
+  f: 'button-full-dose',
+  fy: 'button-all-the-same',
   y: 'button-mine',
   o: 'button-order',
   n: 'button-note',
@@ -68,6 +71,8 @@ export function entryButtons(entry: number, does: readonly DoesToEntry[]): Butto
 export interface Applies {
   /** Whether the dose is for a vessel and one amount, so that it can be noted when it went in. */
   readonly mayBeNoted: boolean;
+  /** Whether it is a smaller dose in place of one that passes a limit. */
+  readonly isCapped?: true;
   readonly stageAssumed: boolean;
   readonly mayBeRed: boolean;
   /** Whether a vessel is named whose colour nobody has told. */
@@ -82,7 +87,8 @@ export interface Applies {
 export function doseButtons(ref: string, applies: Applies): Button[] {
   const all = [
     ...(applies.mayBeNoted ? (['a', 'y'] as const) : []),
-    ...(applies.stageAssumed ? (['nf'] as const) : []),
+    ...(applies.isCapped ? (['f'] as const) : []),
+    ...(applies.stageAssumed && !applies.isCapped ? (['nf'] as const) : []),
     ...(applies.mayBeRed || applies.colourUnknown ? (['red'] as const) : []),
     ...(applies.colourUnknown ? (['white'] as const) : []),
     ...(applies.cautionsShort ? (['s'] as const) : []),
@@ -153,9 +159,8 @@ export interface Pressed {
 
 /** Takes a button's key apart; undefined for one that is of no reading, or that we never made. */
 export function parseKey(key: string): Pressed | undefined {
-  const match = /^(w|s|t|m|nf|red|white|c|l|a|y|o|n|i|gb|ga|gd):(\d{1,9}\.\d{1,9})(?::([a-z]|\d))?$/.exec(
-    key,
-  );
+  const match =
+    /^(k|w|s|t|m|nf|red|white|c|l|fy|f|a|y|o|n|i|gb|ga|gd):(\d{1,9}\.\d{1,9})(?::([a-z]|\d))?$/.exec(key);
   if (!match) return undefined;
   return { does: match[1] as Does, ref: match[2] ?? '', which: match[3] ?? '' };
 }

@@ -1,4 +1,5 @@
 import type { CellarView, Person } from '../../core/cellar/cellar-store.ts';
+import type { Shelf } from '../../core/cellar/shelf.ts';
 import type { Vessel } from '../../core/cellar/vessel.ts';
 import {
   claimKey,
@@ -25,6 +26,8 @@ export interface CellarFacts {
   /** The dose that was last reckoned for a vessel. */
   readonly plans: ReadonlyMap<string, Plan>;
   readonly people: ReadonlyMap<number, Person>;
+  /** The shelves of the chemical store, where they were read. */
+  readonly shelves: readonly Shelf[];
 }
 
 /** Nothing is known yet. */
@@ -33,6 +36,7 @@ export const NO_FACTS: CellarFacts = {
   claims: new Map(),
   plans: new Map(),
   people: new Map(),
+  shelves: [],
 };
 
 /** Where and when a message came in, and all that is known there. */
@@ -54,6 +58,8 @@ export interface Here extends CellarFacts {
   readonly daily?: string;
   /** The number of the entry that the same event has noted before under another key than its own, as it is kept. */
   readonly noted?: string;
+  /** Whether it was told of the vessel before that acidified methods read high in reds. */
+  readonly isRedTold?: boolean;
   /** The keys of what the same event has noted before: it is delivered again. */
   readonly done: ReadonlySet<string>;
   /** What the event's entries are named by, where that is not the event itself. */

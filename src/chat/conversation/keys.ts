@@ -49,6 +49,11 @@ export function buttonKey(
   return `${does} ${JSON.stringify(vessel === undefined ? [chat, ref] : [chat, ref, vessel])}`;
 }
 
+/** Whether it was told of a red that acidified methods read high. */
+export function redToldKey(vessel: string): string {
+  return `red reads high ${vessel}`;
+}
+
 /** Who is about to dose a vessel. */
 export function claimKey(vessel: string): string {
   return `claim ${vessel}`;

@@ -1,5 +1,6 @@
 import type { CellarView, Write } from '../../core/cellar/cellar-store.ts';
 import type { AddedAnswer, DoseAnswer, EffectAnswer, SolutionAnswer } from '../../core/dose/answer.ts';
+import type { TitrationAnswer } from '../../core/laboratory/titration.ts';
 import type { ImportRead } from '../attachments/import-read.ts';
 import type { RoundSheet } from '../attachments/round/round-sheet.ts';
 import type { TotalToFetch } from '../../core/dose/totals-to-fetch.ts';
@@ -74,7 +75,7 @@ export interface PlaceChange {
 }
 
 /** What core answers to one reading. */
-export type Answer = DoseAnswer | EffectAnswer | AddedAnswer | SolutionAnswer;
+export type Answer = DoseAnswer | EffectAnswer | AddedAnswer | SolutionAnswer | TitrationAnswer;
 
 /** What a round takes of each additive, and how many of its lines have no amount because something is wrong, missing or to be chosen. */
 export interface RoundData {

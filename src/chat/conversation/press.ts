@@ -18,7 +18,9 @@ import { keeping, waitFor } from './next-memory.ts';
 import type { Handled } from './ports.ts';
 import { chosen } from './press/chosen.ts';
 import { pressEntry } from './press/entry-buttons.ts';
+import { askFullDose, ruleAgreedTo } from './press/full-dose.ts';
 import { claimDose, noteDose, noteWorkedOut, orderDose } from './press/log-buttons.ts';
+import { keepTitration } from './press/keep-titration.ts';
 import { answerSampled } from './press/sampled.ts';
 import { moreLines, safetyLines, workingOf } from './press/shown-again.ts';
 import { asSaid } from './recall.ts';
@@ -28,6 +30,7 @@ import type { Settings } from './settings.ts';
 import { vesselsIn } from './vessels-named.ts';
 import { choicesFor, letterAt, mayWaitFor, waitsFor } from './waiting.ts';
 import { mannerOf } from './manner.ts';
+import { withShelves } from './with-shelves.ts';
 
 /** A button that was pressed: it means the same however often, and an old or unknown one gets a kind line. */
 export async function handlePress(key: string, here: Here, view: CellarView): Promise<Handled> {
@@ -44,10 +47,13 @@ export async function handlePress(key: string, here: Here, view: CellarView): Pr
   if (!button || remembered?.chat !== message.chat) return saying(settings, [line('first', 'old-button')]);
   const { reading, at } = remembered;
   const found: Remembered = { ...remembered, reading: { ...reading, said_at: reading.said_at ?? at } };
-  const near = await withVessels(here, view, vesselsIn(found.reading.fields));
+  const known = await withVessels(here, view, vesselsIn(found.reading.fields));
+  const near = await withShelves(known, view);
   switch (button.does) {
     case 'a':
       return noteDose(found, near, view);
+    case 'k':
+      return keepTitration(found, near, view);
     case 'n':
       return noteWorkedOut(found, near, view);
     case 'o':
@@ -66,12 +72,14 @@ export async function handlePress(key: string, here: Here, view: CellarView): Pr
     case 'c':
     case 'l':
     case 'y':
+    case 'f':
+    case 'fy':
       return pressed(button.does, button.which, found, near);
   }
 }
 
 function pressed(
-  does: Exclude<Does, 'a' | 'n' | 'o' | 'i' | 'gb' | 'ga' | 'gd'>,
+  does: Exclude<Does, 'k' | 'a' | 'n' | 'o' | 'i' | 'gb' | 'ga' | 'gd'>,
   which: string,
   found: Remembered,
   here: Here,
@@ -93,6 +101,12 @@ function pressed(
       return again(complete(found.reading, { fields: { style: does } }, settings));
     case 'y':
       return claimDose(found, here);
+    case 'f':
+      return askFullDose(found, here);
+    case 'fy': {
+      const over_rule = ruleAgreedTo(found, here);
+      return again(over_rule === undefined ? found.reading : { ...found.reading, over_rule });
+    }
     case 't':
       return askTarget(found, here);
     case 'c': {

@@ -16,11 +16,14 @@ import type { Memory, Waiting } from './memory.ts';
 import type { Handled } from './ports.ts';
 import { handlePress } from './press.ts';
 import { parseRoundKey } from './round/round-key.ts';
+import { saysYes } from '../reader/says-yes.ts';
 import type { Settings } from './settings.ts';
 import { strengthAnswer } from './strength-answer.ts';
 import { vesselsNamed } from './vessels-named.ts';
 import { stillWaiting } from './waiting.ts';
+import { withRedTold } from './with-red-told.ts';
 import { withShared } from './with-shared.ts';
+import { withShelvesFor } from './with-shelves.ts';
 
 /** A text: a mark of a button, an answer to the question that waits, or a message of its own. */
 export async function handleText(text: string, here: Here, view: CellarView): Promise<Handled> {
@@ -29,26 +32,33 @@ export async function handleText(text: string, here: Here, view: CellarView): Pr
   const mark = text.trim().toLowerCase();
   const chosen = waiting && (waiting.letters[mark] ?? choiceByWords(mark, waiting));
   if (chosen) return answerChosen(waiting, chosen, here, view);
-  const key = waiting ? undefined : buttonOfMark(mark, memory);
+  const key = waiting ? undefined : (buttonOfMark(mark, memory) ?? agreedKey(text, memory));
   if (key !== undefined) return handlePress(key, here, view);
   if (!waiting && isNoButton(mark, memory)) return noSuchButton(mark, here);
   const understood = keepManner(read(text, mark, waiting, memory, settings), text, memory);
   const alone = figureAfterTarget(text.trim(), understood, here);
   if (alone) return alone;
   const whole = completed(understood, waiting, settings);
-  const near = await withVessels(here, view, vesselsNamed(whole));
+  const near = await withShelvesFor(whole, await withVessels(here, view, vesselsNamed(whole)), view);
   const [only, another] = whole.readings;
   if (only === undefined || another) return answerRound(checked(whole), near);
   const plan = only && addedAsPlanned(only, near);
   if (plan !== undefined) return handlePress(plan, near, view);
   const commanded = only.intent === 'command' ? await answerCommand(only, near, view) : undefined;
   if (commanded) return { ...commanded, understood: whole, answers: [null] };
-  return answerSingle(checked(whole), near, { completes: whole !== understood });
+  const told = only.intent === 'titration' ? await withRedTold(near, only, view) : near;
+  return answerSingle(checked(whole), told, { completes: whole !== understood });
 }
 
 /** A number while no field waits presses the button that has it. */
 function buttonOfMark(mark: string, { lastButtons }: Memory): string | undefined {
   return /^\d{1,3}$/.test(mark) ? lastButtons[Number(mark) - 1] : undefined;
+}
+
+/** "Yes" to the question whether the full dose is to be given all the same. */
+function agreedKey(text: string, { lastButtons }: Memory): string | undefined {
+  const asked = lastButtons.find((key) => parseKey(key)?.does === 'fy');
+  return asked !== undefined && saysYes(text) ? asked : undefined;
 }
 
 /** A number that could be meant for a button, and that none has. */
@@ -65,6 +75,8 @@ function followsChoice({ lastButtons, lastWasChosen }: Memory): boolean {
 /** "I added it": what was reckoned for that vessel last went in, or what stands above. */
 function addedAsPlanned({ fields, command }: Reading, here: Here): string | undefined {
   const { vessel } = fields;
+  if (command?.name === 'full-dose')
+    return here.memory.lastButtons.find((key) => parseKey(key)?.does === 'f');
   if (command?.name !== 'added-it') return undefined;
   if (vessel === undefined)
     return here.memory.lastButtons.find(
@@ -84,7 +96,8 @@ async function answerChosen(
   const reading = checkFields(complete(waiting.reading, { fields }, settings));
   const decimalMark = memory.decimalMark ?? '.';
   const understood = { readings: [reading], shared: {}, language: settings.language, decimalMark };
-  const near = await withVessels(here, view, vesselsNamed(understood));
+  const known = await withVessels(here, view, vesselsNamed(understood));
+  const near = await withShelvesFor(understood, known, view);
   return answerSingle(understood, near, { completes: true });
 }
 

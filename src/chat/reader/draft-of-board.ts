@@ -54,7 +54,7 @@ function placesOf(board: Board): Partial<Record<FieldName, Place>> {
 }
 
 /** Intents whose moment is kept; beside any other its figures are set aside. */
-const WITH_MOMENT: readonly Intent[] = ['dose', 'added', 'reading', 'command'];
+const WITH_MOMENT: readonly Intent[] = ['dose', 'added', 'reading', 'titration', 'command'];
 
 /** The moment, the lot and the remark, where the message is one that keeps them. */
 function circumstancesOf(board: Board, intent: Intent): Partial<Draft> {

@@ -110,10 +110,14 @@ export function titrate(titration: Titration): TitrationAnswer {
   };
 }
 
+/** Alike with four digits, and with the one decimal that a result is told with. */
+const isSame = (printed: number, found: number): boolean =>
+  printAlike(printed, found) && Math.round(printed * 10) === Math.round(found * 10);
+
 function titrationSteps(titration: Titration, found: number): readonly Step[] {
   const made = withEnoughDigits(
     (digits) => linesOf(titration, digits),
-    (lines) => found === 0 || printAlike(lines.at(-1)?.result.value ?? 0, found),
+    (lines) => found === 0 || isSame(lines.at(-1)?.result.value ?? 0, found),
   );
   return made.map(({ step }) => step);
 }

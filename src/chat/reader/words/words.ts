@@ -72,6 +72,7 @@ export type OwnWordId =
   | 'picture' | 'round' | 'weigh-sheet' | 'added-it' | 'done' | 'invite' | 'keeper' | 'hand' | 'guest' | 'as-role' | 'people' | 'remove' | 'make-role' | 'join' | 'at-cellar' | 'cellars'
   | 'cellar-is' | 'name-cellar' | 'read-along' | 'only-called'
   | 'stock' | 'in-store' | 'how-much' | 'received' | 'used-up' | 'discarded' | 'counted' | 'supplier' | 'for-equipment'
+  | 'lab-aeration' | 'lab-iodine' | 'lab-naoh' | 'lab-iodate' | 'lab-titration' | 'lab-sample' | 'lab-titrant' | 'lab-blank' | 'lab-ascorbic' | 'lab-normal' | 'lab-molar'
   | 'count-half' | 'count-1' | 'count-2' | 'count-3' | 'count-4' | 'count-5' | 'count-6'; // prettier-ignore
 
 /** The plain questions about the trade that people ask again and again. */
