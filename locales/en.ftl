@@ -223,7 +223,8 @@ full-dose-care = The wine may not be sold so under that law. The log keeps that 
 full-dose-none = There is no dose above that would pass a limit.
 button-full-dose = Full dose
 button-all-the-same = Yes, all the same
-over-rule-noted = Kept with it: over the limit ({ rule-short }).
+over-rule-noted = ⚠ It passes the limit ({ rule-short }): that stands in the log with it.
+over-rule = over the limit ({ rule-short })
 total-sum = total { $total } ({ $measured } measured { $day } + { $since } added since)
 assumed-law = unknown is taken at its strictest for the law
 limit-is =
@@ -720,6 +721,7 @@ warning-basis-fallback-change = ⚠ The OIV basis needs alcohol, and 20–40 °C
     [more] more.
    *[less] less.
 }
+warning-must-may-hinder-malolactic = ⚠ Above { $malolactic_unharmed_mg_L } { $unit } in the must malolactic may be hindered (AWRI).
 warning-rounding-coarse = ⚠ What a scale shows is off by { $rounding_mg_L } { $unit } here: use a finer one, or a stock.
 warning-already-dosed = ⚠ It was dosed lately.
 
@@ -896,6 +898,7 @@ step-dose-with-allowance = With the allowance, addition × (1 + allowance):
 step-dose-with-share = With the share that binds, addition ÷ (1 − share):
 step-volume-in-litres = Volume in litres:
 step-room-to-limit = Room, limit − what is kept below it − SO2 now:
+step-must-of-fruit = Must, fruit × litres from 100 kg ÷ 100 kg:
 step-so2-mass = SO2 in grams, addition × volume ÷ 1000:
 step-so2-mass-each = SO2 for one vessel, addition × volume of one ÷ 1000:
 step-all-vessels = For all vessels, one × number:
@@ -1092,6 +1095,12 @@ sheet-open = No amount:
 sheet-caution = Gloves, goggles, ventilate. Never lean into a tank. Mix, measure tomorrow.
 sheet-fetch = In all { $list }
 sheet-additive-name = { round-percent } { additive }
+file-round = A round of { $count } lines.
+file-round-left = Not understood, and left out: line { $lines } of the file.
+file-round-ask = Shall I work out the doses, or only note the readings?
+button-file-dose = Doses
+button-file-note = Note the readings
+button-file-vessels = Take the vessels
 round-gone = No round is kept here: send it again.
 round-target-stage = { at }how many mg/L do you want to add?
 round-not-understood =
@@ -1909,7 +1918,7 @@ stock-lot =
     }
 stock-negative = ⚠ { stock-of }: the log says { $amount }{ stock-tablets }: something was received that is not noted. Note it, or count: stock kmbs 3.2 kg
 stock-low = ⚠ Running low: { $amount }{ stock-tablets } { stock-of } left in store.
-stock-left = Left in store: { $amount }{ stock-tablets } { stock-of }.
+stock-left = In store now: { $amount }{ stock-tablets } { stock-of }.
 stock-short = ⚠ In store by the log: { $amount }{ stock-tablets } { stock-of }, less than this takes.
 stock-old = ⚠ In for over a year: an opened bag loses strength (common practice, no source). Measure free SO2 after it.
 stock-oldest-lot =

@@ -12,7 +12,11 @@ export function additionOf(reading: Reading, answer: AddedAnswer, here: Here): A
   const vessels = vesselsIn(reading.fields);
   const additive = additiveOf(reading);
   const volume_L = reading.fields.volume_L ?? reading.assumed.volume_L;
-  const { steps: _steps, ...amount } = answer;
+  const { steps: _steps, warnings, limit: _limit, total_after_mg_L: _after, ...amount } = answer;
+  const passed = warnings.find(
+    ({ code, values }) => code === 'total-over-limit' && values['confidence'] === 'read',
+  );
+  const over_rule = passed?.values['rule'];
   const plan = vessels.length === 1 ? here.plans.get(vessels[0] ?? '') : undefined;
   const { at } = whenOf(reading, here);
   const ordered = vessels.length === 1 ? (here.vessels.get(vessels[0] ?? '')?.orders ?? []) : [];
@@ -29,6 +33,7 @@ export function additionOf(reading: Reading, answer: AddedAnswer, here: Here): A
     ...(volume_L !== undefined && { volume_L }),
     ...(plan && { planned_mg_L: plan.planned_mg_L }),
     ...(plan?.planned_free_mg_L !== undefined && { planned_free_mg_L: plan.planned_free_mg_L }),
+    ...(typeof over_rule === 'string' && { over_rule }),
     ...(isOrdered && { order: order.entry }),
     ...(chemical_lot !== undefined && { chemical_lot }),
     ...(remark !== undefined && { remark }),

@@ -6,11 +6,12 @@ import { finishReading } from '../reader/finish-reading.ts';
 import type { FieldName, Fields, Reading } from '../reader/understood.ts';
 import type { Here } from './here.ts';
 import type { Plan } from './plan.ts';
+import { totalOfVessel } from './total-of-vessel.ts';
 
 /** What is filled in from memory, by what is asked. Free SO2 never is: it is measured. */
 const FILLED: Readonly<Partial<Record<Reading['intent'], readonly FieldName[]>>> = {
-  dose: ['volume_L', 'ph', ...TRAIT_NAMES],
-  effect: ['volume_L', ...TRAIT_NAMES],
+  dose: ['volume_L', 'ph', 'total_mg_L', ...TRAIT_NAMES],
+  effect: ['volume_L', 'total_mg_L', ...TRAIT_NAMES],
   added: ['volume_L'],
 };
 
@@ -19,8 +20,10 @@ type Facts = Partial<Record<FieldName, { readonly value: unknown; readonly at: n
 /** The facts about a vessel by the names of the fields that they stand for. */
 function factsOf(vessel: Vessel, oldest_pH: number): Facts {
   const { volume_L, ph, traits } = vessel;
+  const total = totalOfVessel(vessel);
   return {
     ...traits,
+    ...(total && { total_mg_L: { value: total.total_mg_L, at: total.at } }),
     ...(volume_L && { volume_L }),
     ...(ph && ph.at >= oldest_pH && { ph }),
   };
@@ -86,6 +89,7 @@ export function recall(reading: Reading, here: Here): Reading {
     ([name]) =>
       fields[name as keyof Fields] === undefined &&
       !(name === 'volume_L' && isAsked) &&
+      !(name === 'total_mg_L' && isBelowFree(wanted, fields)) &&
       !(name === 'ph' && isAddition),
   );
   if (fresh.length === 0) return reading;
@@ -95,12 +99,28 @@ export function recall(reading: Reading, here: Here): Reading {
     {
       ...draft,
       fields: { ...fields, ...Object.fromEntries(fresh.map(([name, known]) => [name, known.value])) },
+      ...totalOf(vessel, fresh),
       // A strength of the salt is no strength of SO2: it goes with the figure.
       ...(isSalt && { strength_of: 'salt' as const }),
       recalled: { ...reading.recalled, ...Object.fromEntries(fresh.map(([name, { at }]) => [name, at])) },
     },
     here.settings,
   );
+}
+
+/** A total that was measured before and lies below what is free now tells nothing of this wine. */
+const isBelowFree = ({ total_mg_L }: Facts, { free_mg_L }: Fields): boolean =>
+  free_mg_L !== undefined && typeof total_mg_L?.value === 'number' && total_mg_L.value < free_mg_L;
+
+/** How a total that was filled in comes about. */
+function totalOf(
+  vessel: Vessel | undefined,
+  fresh: readonly (readonly [string, unknown])[],
+): Pick<Reading, 'totalOf'> {
+  const total = vessel && totalOfVessel(vessel);
+  if (total === undefined || total.since_mg_L === 0 || fresh.every(([name]) => name !== 'total_mg_L'))
+    return {};
+  return { totalOf: { measured_mg_L: total.measured_mg_L, since_mg_L: total.since_mg_L } };
 }
 
 function only(facts: Facts, names: readonly FieldName[]): Facts {
@@ -117,6 +137,6 @@ export function saidFields({ fields, recalled }: Reading): Fields {
 
 /** The reading as it was said, before anything was filled in from memory. */
 export function asSaid(reading: Reading): Reading {
-  const { recalled: _recalled, ...said } = reading;
+  const { recalled: _recalled, totalOf: _sum, ...said } = reading;
   return { ...said, fields: saidFields(reading) };
 }

@@ -4,6 +4,7 @@ import { added } from '../../core/dose/added.ts';
 import type { DoseAnswer, Measure } from '../../core/dose/answer.ts';
 import type { Reading } from '../reader/understood.ts';
 import { sumOf } from './lines/measured.ts';
+import { shownDose } from './lines/shown-dose.ts';
 import type { Plan } from './plan.ts';
 import { additiveOf } from './to-requests.ts';
 
@@ -18,9 +19,10 @@ export function toBeWeighed(
   share: 'all' | 'each' = 'all',
 ): Omit<Plan, 'ref' | 'chat' | 'at'> | undefined {
   const additive = additiveOf(reading);
-  const each = answer.per_vessel;
-  const { measure, stock } = each ?? answer;
-  if (additive === undefined || answer.dose_mg_L === undefined || answer.choices) return undefined;
+  const given = shownDose(answer);
+  const each = given.per_vessel;
+  const { measure, stock } = each ?? given;
+  if (additive === undefined || given.dose_mg_L === undefined || answer.choices) return undefined;
   const isMixed = measure?.unit === 'tablets' && stock !== undefined;
   const shown = measure ?? stock?.measure;
   if (shown === undefined || isMixed) return undefined;
@@ -44,8 +46,8 @@ export function toBeWeighed(
     ...(SO2_g !== undefined && { SO2_g }),
     ...(added_mg_L !== undefined && { added_mg_L }),
     ...(volume_L !== undefined && { volume_L }),
-    planned_mg_L: answer.dose_mg_L,
-    ...(answer.free_after_mg_L !== undefined && { planned_free_mg_L: answer.free_after_mg_L }),
+    planned_mg_L: given.dose_mg_L,
+    ...(given.free_after_mg_L !== undefined && { planned_free_mg_L: given.free_after_mg_L }),
   };
 }
 

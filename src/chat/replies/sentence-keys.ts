@@ -64,6 +64,9 @@ export interface SentenceValues {
   'button-choice-to': 'free';
   'button-done': 'entry';
   'button-dose-anyway': never;
+  'button-file-dose': never;
+  'button-file-note': never;
+  'button-file-vessels': never;
   'button-full-dose': never;
   'button-keep-result': never;
   'button-mine': never;
@@ -328,6 +331,9 @@ export interface SentenceValues {
   'ferment-stop': 'adds';
   'ferment-stop-more': never;
   'figure-alone': 'adds' | 'count' | 'stage' | 'text' | 'unit' | 'wine';
+  'file-round': 'count';
+  'file-round-ask': never;
+  'file-round-left': 'lines';
   folded: never;
   'for-each': 'count';
   'forgotten-person': 'number';
@@ -505,6 +511,7 @@ export interface SentenceValues {
   'ordered-open': never;
   'other-as-allowance': 'amount' | 'count' | 'factor' | 'percent' | 'unit';
   'other-as-share': 'amount' | 'count' | 'divisor' | 'percent' | 'unit';
+  'over-rule': 'band' | 'class' | 'high' | 'low' | 'organic' | 'region' | 'what';
   'over-rule-noted': 'band' | 'class' | 'high' | 'low' | 'organic' | 'region' | 'what';
   'people-head': never;
   'people-how': never;
@@ -803,6 +810,7 @@ export interface SentenceValues {
   'step-molecular-after': never;
   'step-molecular-now': never;
   'step-molecular-sure': never;
+  'step-must-of-fruit': never;
   'step-room-to-limit': never;
   'step-salt-by-recipe': never;
   'step-salt-mass': never;
@@ -912,6 +920,7 @@ export interface SentenceValues {
   'warning-limit-unconfirmed':
     'band' | 'class' | 'high' | 'limit_mg_L' | 'low' | 'of' | 'organic' | 'region' | 'unit' | 'what';
   'warning-molecular-above-2': 'unit';
+  'warning-must-may-hinder-malolactic': 'malolactic_unharmed_mg_L' | 'unit';
   'warning-no-dose-at-this-stage': 'stage';
   'warning-no-limit-on-file': 'region';
   'warning-ph-unusual': 'ph';

@@ -8,10 +8,12 @@ import { assumedLines } from '../lines/assumed.ts';
 import { factLines } from '../lines/facts.ts';
 import { line } from '../lines/line.ts';
 import { vesselText } from '../lines/vessel.ts';
+import { underLines } from '../lines/warnings.ts';
 import { workingLines } from '../lines/working.ts';
 import { perLitre } from '../manner.ts';
 import type { Outcome, Turn } from '../outcome.ts';
-import { additiveOf, toAddedRequest } from '../to-requests.ts';
+import { additiveOf } from '../to-requests.ts';
+import { addedRequestOf } from '../added-request-of.ts';
 import { whenOf } from '../when.ts';
 import { missing } from './missing.ts';
 import { whenIsUnclear } from './when-unclear.ts';
@@ -26,7 +28,7 @@ export function answerAdded(reading: Reading, turn: Turn): Outcome {
   const unsaid = whenIsUnclear(reading, turn);
   if (unsaid) return unsaid;
   const when = whenOf(reading, turn.here);
-  const answer = added(toAddedRequest(reading));
+  const answer = added(addedRequestOf(reading, turn.here));
   if (isWorkedOut(reading)) return confirmed(reading, answer, turn);
   const addition = additionOf(reading, answer, turn.here);
   const noted = notedAddition({ happening: addition, at: when.at }, turn);
@@ -35,7 +37,12 @@ export function answerAdded(reading: Reading, turn: Turn): Outcome {
     ...noted,
     answer,
     lines: [
-      ...noted.lines,
+      ...noted.lines.slice(0, 1),
+      ...underLines(
+        answer.warnings.filter(({ values }) => values['rule'] !== addition.over_rule),
+        manner,
+      ),
+      ...noted.lines.slice(1),
       ...(when.is === 'noon' ? [line('assumed', 'when-noon')] : []),
       ...factLines(reading, manner),
       ...assumedLines(reading, manner),
@@ -64,6 +71,7 @@ function confirmed(reading: Reading, answer: AddedAnswer, turn: Turn): Outcome {
     inRound: [first],
     lines: [
       first,
+      ...underLines(answer.warnings, manner),
       ...factLines(reading, manner),
       ...assumedLines(reading, manner),
       ...workingLines(answer.steps, manner),

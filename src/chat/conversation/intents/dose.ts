@@ -9,12 +9,14 @@ import { choiceLines } from '../lines/choice.ts';
 import { conditionLines, redFigures } from '../lines/condition.ts';
 import { expectationLines } from '../lines/expectation.ts';
 import { factLines } from '../lines/facts.ts';
+import { isCapped } from '../lines/capped.ts';
 import { firstOfDose, hasAmount } from '../lines/first-dose.ts';
 import { basisLines } from '../lines/basis.ts';
 import { bottledLines } from '../lines/bottled.ts';
 import { line } from '../lines/line.ts';
 import { numberText } from '../../replies/number-text.ts';
 import { nothingLines, saidNothingNeeded, saidNothingToWeigh } from '../lines/nothing-needed.ts';
+import { shortLines } from '../lines/stock.ts';
 import { roundDoseLine, roundNothingLine } from '../lines/round-dose.ts';
 import { vesselText } from '../lines/vessel.ts';
 import { underLines, warningLines } from '../lines/warnings.ts';
@@ -24,6 +26,7 @@ import type { Outcome, Turn } from '../outcome.ts';
 import { toBeWeighed } from '../to-be-weighed.ts';
 import { additiveOf, toDoseRequest } from '../to-requests.ts';
 import { vesselsIn } from '../vessels-named.ts';
+import { cappedDose } from './capped-dose.ts';
 import { fermentStop } from './ferment-stop.ts';
 import { noDose } from './no-dose.ts';
 import { notPermitted } from './not-permitted.ts';
@@ -48,6 +51,7 @@ export function answerDose(reading: Reading, turn: Turn): Outcome {
   if (reading.asks.length > 0) return partialDose(reading, request, answer, turn);
   if (saidNothingToWeigh(answer)) return nothing(reading, answer, turn);
   if (answer.choices) return choice(reading, answer, turn);
+  if (isCapped(answer)) return cappedDose(reading, answer, turn);
   return wholeDose(reading, request, answer, turn);
 }
 
@@ -76,6 +80,7 @@ function wholeDose(reading: Reading, request: DoseRequest, answer: DoseAnswer, t
       ...first.slice(0, 1),
       ...underLines(answer.warnings, manner),
       ...first.slice(1),
+      ...shortLines(toBeWeighed(reading, answer), turn.here),
       ...condition,
       ...expectationLines(reading, answer, otherArithmetic(request), manner),
       ...factLines(reading, manner),

@@ -4,10 +4,13 @@ import { momentText } from '../../replies/moment-text.ts';
 import type { Line } from '../../replies/reply.ts';
 import { vesselNames } from '../../replies/vessel-name.ts';
 import { entryButtons } from '../buttons.ts';
+import { withOnlyLot } from '../drawn.ts';
 import { claimKey, ZONE_ASKED_KEY } from '../keys.ts';
 import { line } from '../lines/line.ts';
 import { besideAmount, notedAmount } from '../lines/noted-amount.ts';
+import { ruleValues } from '../lines/rule.ts';
 import { oddLines } from '../lines/odd.ts';
+import { drawnLines } from '../lines/stock.ts';
 import { numberOf } from '../lines/amount-text.ts';
 import { perLitre } from '../manner.ts';
 import type { Note } from '../note.ts';
@@ -20,10 +23,12 @@ export interface AdditionNote extends Note {
 }
 
 /** An addition is noted: what is said to it, with undo beside it, and when to measure. */
-export function notedAddition(note: AdditionNote, turn: Pick<Turn, 'here' | 'manner'>): Outcome {
+export function notedAddition(told: AdditionNote, turn: Pick<Turn, 'here' | 'manner'>): Outcome {
   const { here } = turn;
+  const note = { ...told, happening: withOnlyLot(told, here) };
+  const stock = drawnLines(note, here);
   const first = notedLine(note, turn);
-  const odd = oddLines(note, turn);
+  const odd = [...overLines(note, turn), ...oddLines(note, turn)];
   const isZoneAsked = here.settings.zone === undefined && !here.isZoneAsked;
   return {
     answer: null,
@@ -33,10 +38,25 @@ export function notedAddition(note: AdditionNote, turn: Pick<Turn, 'here' | 'man
       ...note.happening.vessels.map((vessel) => ({ kind: 'drop', key: claimKey(vessel) }) as const),
       ...(isZoneAsked ? [{ kind: 'keep', key: ZONE_ASKED_KEY, text: 'true' } as const] : []),
     ],
-    inRound: [first, ...odd],
-    lines: [first, ...odd, nextLine(note, turn), ...(isZoneAsked ? [line('question', 'ask-zone')] : [])],
+    inRound: [first, ...odd, ...stock.odd],
+    lines: [
+      first,
+      ...odd,
+      ...stock.odd,
+      ...stock.left,
+      nextLine(note, turn),
+      ...(isZoneAsked ? [line('question', 'ask-zone')] : []),
+    ],
     buttons: entryButtons(here.nextEntry, ['u', 'r']),
   };
+}
+
+/** That it passes a limit: the entry keeps it. */
+function overLines({ happening }: AdditionNote, { manner }: Pick<Turn, 'manner'>): Line[] {
+  const { over_rule } = happening;
+  return over_rule === undefined
+    ? []
+    : [line('first', 'over-rule-noted', ruleValues(over_rule, manner.mark))];
 }
 
 function notedLine({ happening, at }: AdditionNote, { here, manner }: Pick<Turn, 'here' | 'manner'>): Line {

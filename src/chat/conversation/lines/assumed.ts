@@ -42,9 +42,26 @@ function recalledParts(reading: Reading, manner: Manner, weighs: boolean): Part[
       ];
     if (name === 'strength_percent' || (name === 'additive' && !weighs)) return [];
     const day = manner.day(at);
+    if (name === 'total_mg_L' && reading.totalOf) return [totalSum(reading.totalOf, fields, day, manner)];
     if (name === 'additive') return [part('recalled-additive', { day, additive: fields.additive ?? '' })];
     const value = { [name]: fields[name as FieldName] } as Fields;
     return [{ ...part('recalled', { day }), list: partsOf(reading, value, manner) }];
+  });
+}
+
+/** A total that is a sum: what was measured, and what went in since. */
+function totalSum(
+  { measured_mg_L, since_mg_L }: NonNullable<Reading['totalOf']>,
+  { total_mg_L = 0 }: Fields,
+  day: string,
+  { mark }: Manner,
+): Part {
+  const said = (value: number): string => numberText(value, 1, mark);
+  return part('total-sum', {
+    total: said(total_mg_L),
+    measured: said(measured_mg_L),
+    since: said(since_mg_L),
+    day,
   });
 }
 

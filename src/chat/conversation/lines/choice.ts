@@ -9,9 +9,15 @@ import { redFigures, redValues } from './condition.ts';
 import { line } from './line.ts';
 import { measuredAmount } from './measured.ts';
 
-/** The limit of a wine as a text; `none` where we know of none. */
-export function limitText({ limit }: Pick<DoseAnswer, 'limit'>, manner: Manner): string {
-  return limit === undefined ? 'none' : perLitre(limit.limit_mg_L, manner);
+/** The limit of a wine as a text, `none` where we know of none, and whose law it is. */
+export function limitNamed(
+  { limit }: Pick<DoseAnswer, 'limit'>,
+  manner: Manner,
+): { readonly limit: string; readonly region: string } {
+  return {
+    limit: limit === undefined ? 'none' : perLitre(limit.limit_mg_L, manner),
+    region: limit?.region ?? 'oiv',
+  };
 }
 
 /** The first lines where a usual target would need so much free SO2 that a person has to choose. */
@@ -41,7 +47,7 @@ function redLine(answer: DoseAnswer, manner: Manner): Line[] {
   const free = red?.['target_free_mg_L'];
   if (red === undefined || typeof free !== 'number') return [];
   const values = { ...redValues(red, manner), free: concentrationText(free, manner.mark) };
-  return [line('first', 'choice-red', { ...values, limit: limitText(answer, manner) })];
+  return [line('first', 'choice-red', { ...values, ...limitNamed(answer, manner) })];
 }
 
 function optionLine(
@@ -61,7 +67,7 @@ function optionLine(
   const amount = additive && measuredAmount(choice, additive, manner);
   if (amount)
     return line('first', 'choice-to', { ...values, ...amount, total: totalFor(choice, reading, answer) });
-  return line('first', 'choice-no-amount', { ...values, limit: limitText(answer, manner) });
+  return line('first', 'choice-no-amount', { ...values, ...limitNamed(answer, manner) });
 }
 
 /** An unknown total matters where free SO2 alone would be more than half of the limit. */

@@ -9,6 +9,7 @@ import type { Here } from '../here.ts';
 import { tellingOf } from '../telling.ts';
 import { lawFacts } from './law-facts.ts';
 import { part } from './line.ts';
+import { ruleValues } from './rule.ts';
 import { besideAmount, notedAmount } from './noted-amount.ts';
 
 type Part = Omit<Line, 'room'>;
@@ -26,7 +27,7 @@ export function entryPart(entry: LoggedEntry, here: Pick<Here, 'settings' | 'mem
       const values = { vessel, added, known: amount ? 'some' : 'none' };
       return {
         ...part(`entry-${entry.kind}`, values),
-        list: [...(amount ? [amount] : []), ...besideAmount(entry)],
+        list: [...(amount ? [amount] : []), ...overRule(entry, mark), ...besideAmount(entry)],
       };
     }
     case 'reading':
@@ -39,10 +40,22 @@ export function entryPart(entry: LoggedEntry, here: Pick<Here, 'settings' | 'mem
     case 'other':
       return part('entry-other', { vessel, text: entry.remark });
     case 'stock':
-      return part('entry-stock', { text: entry.remark ?? '' });
+      return stockPart(entry, mark);
     case 'correction':
       return part('entry-correction', { entry: String(entry.corrects), reason: entry.reason });
   }
+}
+
+function stockPart(entry: Extract<Entry, { kind: 'stock' }>, mark: DecimalMark): Part {
+  const amount = notedAmount(entry, mark);
+  const values = { event: entry.event, supplier: entry.supplier ?? 'none' };
+  return { ...part('entry-stock', values), list: [...(amount ? [amount] : []), ...besideAmount(entry)] };
+}
+
+/** The rule that an addition was known to pass. */
+function overRule(entry: Extract<Entry, { kind: 'addition' | 'order' }>, mark: DecimalMark): Part[] {
+  const over_rule = entry.kind === 'addition' ? entry.over_rule : undefined;
+  return over_rule === undefined ? [] : [part('over-rule', ruleValues(over_rule, mark))];
 }
 
 function measuredParts(entry: Extract<Entry, { kind: 'reading' }>, mark: DecimalMark): Part[] {

@@ -6,6 +6,7 @@ import type { Reading } from '../../reader/understood.ts';
 import { numberText } from '../../replies/number-text.ts';
 import type { Line } from '../../replies/reply.ts';
 import { molecularPerLitre, perLitre, type Manner } from '../manner.ts';
+import { givenAnswer } from './given-answer.ts';
 import { line } from './line.ts';
 import { measuredAmount } from './measured.ts';
 import { vesselText } from './vessel.ts';
@@ -30,17 +31,27 @@ export function knownSoFar(
   if (answer.choices || !answer.dose_mg_L) return [need, now].filter((one) => one !== undefined);
   const detail = [now && { ...now, room: 'effect' as const }, need && { ...need, room: 'effect' as const }];
   return [
-    rateLine(request, answer.dose_mg_L, vessel, manner),
+    rateLine(reading, request, answer.dose_mg_L, vessel, manner),
     ...detail
       .filter((one) => one !== undefined)
       .map((one) => ({ ...one, values: { ...one.values, vessel: 'none' } })),
   ];
 }
 
-function rateLine(request: DoseRequest, dose_mg_L: number, vessel: string, manner: Manner): Line {
+/** The dose that is shown: the smaller one, unless the full one was asked for with the rule that it passes. */
+const asked = (answer: DoseAnswer, { over_rule }: Reading): DoseAnswer =>
+  answer.capped?.rule === over_rule ? answer : givenAnswer(answer);
+
+function rateLine(
+  reading: Reading,
+  request: DoseRequest,
+  dose_mg_L: number,
+  vessel: string,
+  manner: Manner,
+): Line {
   const per = PER[manner.units];
   const { vessels: _vessels, ...wine } = request;
-  const forOne = dose({ ...wine, volume_L: per.volume_L });
+  const forOne = asked(dose({ ...wine, volume_L: per.volume_L }), reading);
   const values = { vessel, dose: perLitre(dose_mg_L, manner) };
   if (request.additive === undefined || forOne.measure === undefined || forOne.measure.unit === 'tablets')
     return line('first', 'dose-rate-bare', values);

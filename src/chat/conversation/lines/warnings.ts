@@ -1,9 +1,11 @@
 import type { Warning, WarningCode } from '../../../core/dose/answer.ts';
+import { KEPT_FOR_METHOD_mg_L } from '../../../core/limits/check-limit.ts';
 import { numberText } from '../../replies/number-text.ts';
 import { concentrationText, molecularText } from '../../replies/quantity-text.ts';
 import type { Line } from '../../replies/reply.ts';
 import type { Manner } from '../manner.ts';
 import { line } from './line.ts';
+import { rowOfRule, ruleValues } from './rule.ts';
 
 /** At most so many stand in a reply; the rest is behind `More`. */
 const MOST = 3;
@@ -27,14 +29,18 @@ function isTold(warning: Warning): warning is Told {
   return SAID_ELSEWHERE.every((code) => code !== warning.code);
 }
 
-/** No limit is spoken of unless it is passed or near. */
-const ONLY_BEHIND_MORE: readonly WarningCode[] = ['no-limit-on-file', 'limit-unconfirmed'];
+/** Where nobody has told the market, no limit is spoken of unless it is passed or near. */
+const OF_A_MARKET: readonly WarningCode[] = ['no-limit-on-file', 'limit-unconfirmed'];
+
+const isOfNoMarket = ({ code, values }: Warning): boolean =>
+  OF_A_MARKET.includes(code) && (values['region'] === undefined || values['region'] === 'oiv');
 
 /** What may forbid the addition: it stands right under the answer, and is never folded away. */
 const RIGHT_UNDER = [
   'stage-not-over',
   'additive-not-permitted',
   'total-over-limit',
+  'free-over-limit',
 ] as const satisfies readonly WarningCode[];
 
 /** The warnings that stand right under the first line, with who is to be asked. */
@@ -52,6 +58,19 @@ function totalMatters({ code, values }: Warning): boolean {
   return typeof after === 'number' && typeof limit === 'number' && after > limit / 2;
 }
 
+/** Where the market is told, an unknown total may be no more than the limit leaves beside the dose. */
+function mostMatters({ values }: Warning): boolean {
+  const { rule, most_total_mg_L: most } = values;
+  return typeof rule === 'string' && !rule.startsWith('oiv') && typeof most === 'number';
+}
+
+/** Near a limit only because of what is kept for bottling, which the vessel's own facts say. */
+function isForBottlingOnly({ code, values }: Warning): boolean {
+  const { total_after_mg_L: after, limit_mg_L: limit } = values;
+  if (code !== 'total-near-limit' || typeof after !== 'number' || typeof limit !== 'number') return false;
+  return after < limit - KEPT_FOR_METHOD_mg_L;
+}
+
 /** The weightiest warnings, at most three; `besides` are those whose matter stands in the reply already. */
 export function warningLines(
   warnings: readonly Warning[],
@@ -61,8 +80,9 @@ export function warningLines(
 ): Line[] {
   return warnings
     .filter(isTold)
-    .filter(({ code }) => ![...ONLY_BEHIND_MORE, ...RIGHT_UNDER, ...besides].includes(code))
-    .filter(totalMatters)
+    .filter(({ code }) => ![...RIGHT_UNDER, ...besides].includes(code))
+    .filter((warning) => !isOfNoMarket(warning) && !isForBottlingOnly(warning))
+    .filter((warning) => totalMatters(warning) || mostMatters(warning))
     .filter(({ values }) => values['measure_gives_mg_L'] === undefined) // the tablets' own line says so
     .slice(0, MOST)
     .map((warning) => warningLine(warning, manner, room));
@@ -80,16 +100,32 @@ function warningLine({ code, values }: Told, manner: Manner, room: Line['room'])
       limit_mg_L: textOf('limit_mg_L', values['limit_mg_L'] ?? '', manner),
       unit: manner.unit,
     });
+  if (code === 'total-unknown' && mostMatters({ code, values }))
+    return line(room, 'warning-total-unknown-most', {
+      ...lawValues(values, manner),
+      ...byName(texts),
+      unit: manner.unit,
+    });
   const change = values['need_change_mg_L'];
   const tellsChange = code === 'basis-fallback' && typeof change === 'number';
   return line(room, tellsChange ? 'warning-basis-fallback-change' : `warning-${code}`, {
     unit: manner.unit,
-    ...Object.fromEntries<string>(texts),
+    ...lawValues(values, manner),
+    ...byName(texts),
+    ...(code === 'label-threshold' && { comparator: values['comparator'] === '>' ? 'more' : 'from' }),
     ...(tellsChange && {
       change: concentrationText(Math.abs(change), manner.mark),
       direction: change > 0 ? 'more' : 'less',
     }),
   });
+}
+
+const byName = (texts: readonly (readonly [string, string])[]): Record<string, string> =>
+  Object.fromEntries(texts);
+
+/** A rule of the law by what it says and not by its id; of the label, and of additives, the market alone. */
+function lawValues({ rule }: Warning['values'], { mark }: Manner): Line['values'] {
+  return typeof rule === 'string' && rowOfRule(rule) !== undefined ? ruleValues(rule, mark) : {};
 }
 
 /** A warning's figure by its name: molecular SO2 to 0.01, concentrations to 1 or 0.1, the rest to 0.01. */

@@ -3,7 +3,7 @@ import type { Reading } from '../../reader/understood.ts';
 import type { Line } from '../../replies/reply.ts';
 import { doseOf } from '../dose-of.ts';
 import type { Here } from '../here.ts';
-import { limitText } from '../lines/choice.ts';
+import { limitNamed } from '../lines/choice.ts';
 import { line } from '../lines/line.ts';
 import { vesselText } from '../lines/vessel.ts';
 import { mannerOf, molecularPerLitre } from '../manner.ts';
@@ -24,6 +24,6 @@ export function chosen(
     return { lines: [line('first', 'choice-left', { vessel, molecular }), line('first', 'ways-out')] };
   }
   if (choice.over_limit)
-    return { lines: [line('first', 'choice-over', { vessel, limit: limitText(answer, manner) })] };
+    return { lines: [line('first', 'choice-over', { vessel, ...limitNamed(answer, manner) })] };
   return { target: choice.target };
 }

@@ -30,6 +30,7 @@ export function doseAdditions({ reading, chat, ref }: Remembered, here: Here): K
         kind: 'addition',
         vessels: [vessel],
         ...weighed,
+        ...(reading.over_rule !== undefined && { over_rule: reading.over_rule }),
         ...(isOrdered && { order: order.entry }),
       },
       key: buttonKey('dose', chat, ref, another === undefined ? undefined : vessel),

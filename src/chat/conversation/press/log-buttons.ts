@@ -25,9 +25,10 @@ import type { Handled } from '../ports.ts';
 import { replying } from '../replying.ts';
 import { tellingOf } from '../telling.ts';
 import { toBeWeighed } from '../to-be-weighed.ts';
-import { toAddedRequest } from '../to-requests.ts';
 import { vesselsIn } from '../vessels-named.ts';
 import { whenOf } from '../when.ts';
+import { addedRequestOf } from '../added-request-of.ts';
+import { withShelves } from '../with-shelves.ts';
 
 /** "I added it" under a dose: one entry for each vessel, however often and by however many it is pressed. */
 export async function noteDose(found: Remembered, here: Here, view: CellarView): Promise<Handled> {
@@ -45,7 +46,7 @@ export async function noteDose(found: Remembered, here: Here, view: CellarView):
 /** "Note it" under an addition whose amount was worked out. */
 export async function noteWorkedOut(found: Remembered, here: Here, view: CellarView): Promise<Handled> {
   const { reading } = found;
-  const happening = additionOf(reading, added(toAddedRequest(reading)), here);
+  const happening = additionOf(reading, added(addedRequestOf(reading, here)), here);
   const { at } = whenOf(reading, here);
   return noteOnce({ happening, at }, buttonKey('note', found.chat, found.ref), here, view);
 }
@@ -61,7 +62,8 @@ export async function noteOnce(
   if (standing) return alreadyNoted(standing, here);
   const keyed = { ...note, key: next };
   const manner = mannerOf(NO_READING, here.memory.decimalMark ?? '.', here);
-  return noted(notedAddition(keyed, { here, manner }), here);
+  const near = await withShelves(here, view);
+  return noted(notedAddition(keyed, { here: near, manner }), here);
 }
 
 const NO_READING: Reading = emptyReading('added');
@@ -82,6 +84,7 @@ function doseAsAddition({ reading }: Remembered, here: Here): Addition | undefin
     kind: 'addition',
     vessels,
     ...weighed,
+    ...(reading.over_rule !== undefined && { over_rule: reading.over_rule }),
     ...(order && order.additive === weighed.additive && { order: order.entry }),
   };
 }
@@ -116,7 +119,14 @@ export async function orderDose(found: Remembered, here: Here, view: CellarView)
   const key = buttonKey('order', found.chat, found.ref);
   const { standing, next } = await notedBy(key, view);
   if (standing) return alreadyNoted(standing, here);
-  const { kind: _kind, planned_mg_L: _mg, planned_free_mg_L: _free, order: _order, ...amount } = addition;
+  const {
+    kind: _kind,
+    planned_mg_L: _mg,
+    planned_free_mg_L: _free,
+    order: _order,
+    over_rule: _rule,
+    ...amount
+  } = addition;
   const order: Order = { kind: 'order', ...amount };
   const manner = mannerOf(NO_READING, here.memory.decimalMark ?? '.', here);
   return noted(notedOrder({ happening: order, at: here.message.at, key: next }, { here, manner }), here);

@@ -9,6 +9,7 @@ import { buttonsFor, type LABELS } from '../buttons.ts';
 import { redFigures } from '../lines/condition.ts';
 import { cautionLines } from '../lines/cautions.ts';
 import { stepsOfSolution } from '../intents/solution.ts';
+import { givenAnswer } from '../lines/given-answer.ts';
 import { line } from '../lines/line.ts';
 import { vesselText } from '../lines/vessel.ts';
 import { allWarningLines } from '../lines/warnings.ts';
@@ -39,7 +40,7 @@ function reckonAgain(reading: Reading, settings: Settings): Reckoned {
       return { steps: request ? stepsOfSolution(solution(request)) : [], warnings: [] };
     }
     case 'dose':
-      return doseOf(reading, settings);
+      return givenAnswer(doseOf(reading, settings));
     case 'reading':
     case 'titration':
     case 'command':
