@@ -6,6 +6,7 @@ import type { SentenceKey } from './sentence-keys.ts';
 export const HELP_KEYS: Readonly<Record<string, readonly SentenceKey[]>> = {
   wine: ['help-wine-1', 'help-wine-2', 'help-wine-3', 'help-wine-4', 'help-wine-5', 'help-wine-6', 'help-wine-7', 'help-wine-8', 'help-wine-9'],
   solutions: ['help-solutions-1', 'help-solutions-2', 'help-solutions-3', 'help-solutions-4', 'help-solutions-5', 'help-solutions-6', 'help-solutions-7'],
+  stock: ['help-stock-1', 'help-stock-2', 'help-stock-3', 'help-stock-4', 'help-stock-5', 'help-stock-6', 'help-stock-7'],
   log: ['help-log-1', 'help-log-2', 'help-log-3', 'help-log-4', 'help-log-5', 'help-log-6', 'help-log-7', 'help-log-8'],
   vessels: ['help-vessels-1', 'help-vessels-2', 'help-vessels-3', 'help-vessels-4', 'help-vessels-5', 'help-vessels-6', 'help-vessels-7', 'help-vessels-8', 'help-vessels-9', 'help-vessels-10'],
   reminders: ['help-reminders-1', 'help-reminders-2', 'help-reminders-3', 'help-reminders-4', 'help-reminders-5', 'help-reminders-6'],
@@ -13,5 +14,4 @@ export const HELP_KEYS: Readonly<Record<string, readonly SentenceKey[]>> = {
   pictures: ['help-pictures-1', 'help-pictures-2'],
   files: ['help-files-1', 'help-files-2', 'help-files-3', 'help-files-4'],
   people: ['help-people-1', 'help-people-2', 'help-people-3', 'help-people-4', 'help-people-5', 'help-people-6', 'help-people-7'],
-  stock: ['help-stock-1', 'help-stock-2', 'help-stock-3', 'help-stock-4', 'help-stock-5', 'help-stock-6', 'help-stock-7'],
 };

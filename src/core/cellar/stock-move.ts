@@ -48,12 +48,11 @@ interface Amounts {
   readonly tablets?: number;
 }
 
-/** Tablets are counted although their grams are known; a solution is measured. */
-function amountOf({
-  mass_g,
-  additive_volume_mL,
-  tablets,
-}: Amounts): { value: number; unit: StockUnit } | undefined {
+/** Tablets are counted also where the log has the grams that they give; a solution is measured. */
+function amountOf(noted: Amounts & AdditiveNoted): { value: number; unit: StockUnit } | undefined {
+  const { mass_g, additive_volume_mL, tablet_SO2_g, tablet_salt_g } = noted;
+  const size_g = tablet_SO2_g ?? tablet_salt_g;
+  const tablets = noted.tablets ?? (size_g && mass_g !== undefined ? mass_g / size_g : undefined);
   if (tablets !== undefined) return { value: tablets, unit: 'tablets' };
   if (additive_volume_mL !== undefined) return { value: additive_volume_mL, unit: 'mL' };
   return mass_g === undefined ? undefined : { value: mass_g, unit: 'g' };

@@ -13,7 +13,7 @@ const LIKE_A_TIME = /^\d{1,2}[:h]\d{2}$|^\d{1,2}\.? ?\p{L}{3,9}\.?$/u;
  * That nothing is noted, because it is not clear when it was: the hour is still to come, or there is no such one.
  * Undefined where the time may stand.
  */
-export function whenIsUnclear(reading: Reading, { here }: Turn): Outcome | undefined {
+export function whenIsUnclear(reading: Reading, { here }: Pick<Turn, 'here'>): Outcome | undefined {
   const when = whenOf(reading, here);
   const vessel = vesselText(reading);
   const { toCome } = reading.marks;

@@ -1,11 +1,13 @@
 import type { CellarView, Write } from '../../../core/cellar/cellar-store.ts';
 import type { LoggedEntry } from '../../../core/cellar/entry.ts';
 import type { Line } from '../../replies/reply.ts';
+import { drawnBy, shelvesAfter, withOnlyLot } from '../drawn.ts';
 import type { Here } from '../here.ts';
 import { notedAddition, type AdditionNote } from '../intents/noted-addition.ts';
 import { mannerOf } from '../manner.ts';
 import { emptyReading } from '../../reader/empty-reading.ts';
 import { noting } from '../note.ts';
+import { withShelves } from '../with-shelves.ts';
 import type { KeyedAddition } from './dose-additions.ts';
 import { notedBy } from './noted-by.ts';
 
@@ -29,6 +31,8 @@ export async function noteMany(
   const keeps: Write[] = [];
   const odd: Line[] = [];
   const before: LoggedEntry[] = [];
+  const near = await withShelves(here, view);
+  let { shelves } = near;
   const manner = mannerOf(emptyReading('added'), here.memory.decimalMark ?? '.', here);
   for (const { addition, key } of additions) {
     const { standing, next } = await notedBy(key, view);
@@ -36,11 +40,12 @@ export async function noteMany(
       before.push(standing);
       continue;
     }
-    const note = { happening: addition, at: here.message.at, key: next };
-    const outcome = notedAddition(note, {
-      here: { ...here, nextEntry: here.nextEntry + notes.length },
-      manner,
-    });
+    const now = { ...near, shelves, nextEntry: here.nextEntry + notes.length };
+    const told = { happening: addition, at: here.message.at, key: next };
+    const note = { ...told, happening: withOnlyLot(told, now) };
+    const outcome = notedAddition(note, { here: now, manner });
+    // The next one finds what this one leaves.
+    shelves = shelvesAfter(shelves, drawnBy(note, now));
     notes.push(note);
     keeps.push(...(outcome.keeps ?? []).filter(({ kind }) => kind === 'drop'));
     odd.push(...outcome.inRound.slice(1));

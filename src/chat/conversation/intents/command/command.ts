@@ -16,6 +16,7 @@ import { limitSheet } from './limit-sheet.ts';
 import { listVessels, listDue, listOrders } from './lists.ts';
 import { lastSheet } from '../../round/take-sheet.ts';
 import { setSetting, settingWrong, showSettings } from './settings.ts';
+import { noteStock, showStock } from './stock.ts';
 import { strikeEntry, undoEntry } from './undo.ts';
 import { takeAway } from './take-away.ts';
 import { vesselSheet } from './vessel-sheet.ts';
@@ -70,6 +71,10 @@ export async function answerCommand(
       return replying(here, { lines: [line('first', 'full-dose-none')] });
     case 'picture':
       return drawPicture(fields.vessel, here);
+    case 'stock':
+      return showStock(fields.additive, here, view);
+    case 'stock-note':
+      return noteStock(reading, command, here, view);
     case 'added-it':
       return replying(here, { lines: [line('first', 'added-it-none', { vessel: vesselText(reading) })] });
     case 'invite':
