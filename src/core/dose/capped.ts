@@ -6,7 +6,7 @@ import { minus, type Step } from '../working.ts';
 import type { CappedDose } from './answer.ts';
 import { doseSteps } from './dose-steps.ts';
 import { landing } from './landing.ts';
-import { line, MOST_DIGITS } from './line.ts';
+import { line } from './line.ts';
 import { portionOf } from './portion.ts';
 import type { DoseRequest } from './request.ts';
 import { beforeOf, limitsIn, passesLimit, type RoomToLimit } from './room-to-limit.ts';
@@ -65,9 +65,28 @@ export function capped(
   };
 }
 
-/** What may go in under a limit, with what is kept below it, mg/L; to the digits that readings have. */
+/** Digits of the room: all that hundredths have. */
+const ROOM_DIGITS = 9;
+
+/** A hundredth of a mg/L, that way which makes the room smaller: so the working is short and never too kind. */
+const downToHundredth = (mg_L: number): number => Math.floor(mg_L * 100 + 1e-6) / 100;
+const upToHundredth = (mg_L: number): number => Math.ceil(mg_L * 100 - 1e-6) / 100;
+
+/** What a limit leaves, to the hundredth: the limit and the SO2 that counts for it, mg/L. */
+function sidesOf(
+  limit: Limit,
+  room: RoomToLimit,
+): { readonly limit_mg_L: number; readonly before_mg_L: number } {
+  return {
+    limit_mg_L: downToHundredth(limit.limit_mg_L),
+    before_mg_L: upToHundredth(beforeOf(limit, room) ?? 0),
+  };
+}
+
+/** What may go in under a limit, with what is kept below it, mg/L. */
 function roomUnder(limit: Limit, room: RoomToLimit): number {
-  return Number((limit.limit_mg_L - room.kept_mg_L - (beforeOf(limit, room) ?? 0)).toPrecision(12));
+  const { limit_mg_L, before_mg_L } = sidesOf(limit, room);
+  return Number((limit_mg_L - upToHundredth(room.kept_mg_L) - before_mg_L).toFixed(2));
 }
 
 /** Of the limits that were read, the one that leaves the least room. */
@@ -78,10 +97,9 @@ function tightest(room: RoomToLimit): Limit | undefined {
 }
 
 function roomStep(limit: Limit, room: RoomToLimit): Step {
-  const kept = shown(room.kept_mg_L, 'mg/L');
-  const before = shown(beforeOf(limit, room) ?? 0, 'mg/L', MOST_DIGITS);
-  const term = minus(minus(shown(limit.limit_mg_L, 'mg/L', MOST_DIGITS), kept), before);
-  return line('room-to-limit', term, 'mg/L', MOST_DIGITS).step;
+  const { limit_mg_L, before_mg_L } = sidesOf(limit, room);
+  const left = minus(shown(limit_mg_L, 'mg/L'), shown(upToHundredth(room.kept_mg_L), 'mg/L'));
+  return line('room-to-limit', minus(left, shown(before_mg_L, 'mg/L')), 'mg/L', ROOM_DIGITS).step;
 }
 
 /** From the room to the amount; no share and no allowance, as the room is what goes in. */
