@@ -199,12 +199,24 @@ dose-capped =
         }{ $after }, limit { $limit } { $unit } ({ rule-short }).
     }
 dose-at-limit =
-    { $of ->
-        [free] { at }no sulfite now, at the limit: free { $now }, limit { $limit } { $unit } free ({ rule-short }).
-       *[total] { at }no sulfite now, at the limit: total { $least ->
+    { at }no sulfite now, { $standing ->
+        [over] over the limit already
+       *[at] at the limit
+    }: { $of ->
+        [free] free { $now }, limit { $limit } { $unit } free ({ rule-short }).
+       *[total] total { $least ->
             [yes] at least{" "}
            *[no] {""}
         }{ $now }, limit { $limit } { $unit } ({ rule-short }).
+    }
+dose-over-already = It may not be sold so under that law{ law-decides }: ask whoever answers for this wine.
+law-assumed = Unknown, so at its strictest for the limit: { $list }.
+law-unknown =
+    { $code ->
+        [colour-assumed] colour
+        [sugar-assumed] sugar
+        [sparkling-class-assumed] class of sparkling
+       *[density-assumed] density
     }
 dose-capped-kept =
     { $reserve ->
@@ -226,7 +238,6 @@ button-all-the-same = Yes, all the same
 over-rule-noted = ⚠ It passes the limit ({ rule-short }): that stands in the log with it.
 over-rule = over the limit ({ rule-short })
 total-sum = total { $total } ({ $measured } measured { $day } + { $since } added since)
-assumed-law = unknown is taken at its strictest for the law
 limit-is =
     { at }{ $operator ->
         [below] below
@@ -1674,6 +1685,7 @@ export-added_mg_L = SO2 added mg/L
 export-planned_mg_L = SO2 planned mg/L
 export-planned_free_mg_L = Free SO2 aimed at mg/L
 export-volume_L = Volume L
+export-stock-left = Left in store (g, mL, tablets)
 export-us-gallons = Volume US gal
 export-ph = pH
 export-free_mg_L = Free SO2 mg/L

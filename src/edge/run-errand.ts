@@ -72,21 +72,24 @@ async function runExport(
   errands: Errands,
 ): Promise<Brought> {
   const { store, say } = errands;
-  const { from, to, vessel, format, zone, decimalMark, language } = errand;
+  const { from, to, vessel, of, format, zone, decimalMark, language } = errand;
   // From the beginning on: what was known of a wine then follows from all that came before.
   const { entries, people } = await store.look(message.cellar, async (view) => ({
     entries: await view.entries({ ...(to !== undefined && { to }) }),
     people: await view.people(),
   }));
   const isWanted = entries.some(
-    ({ at, vessels }) =>
-      (from === undefined || at >= from) && (vessel === undefined || vessels.includes(vessel)),
+    ({ at, vessels, kind }) =>
+      (from === undefined || at >= from) &&
+      (vessel === undefined || vessels.includes(vessel)) &&
+      (of === undefined || kind === 'stock'),
   );
   if (!isWanted) return { said: [saying('export-none', {}, message, say)] };
   const span = {
     ...(from !== undefined && { from }),
     ...(to !== undefined && { to }),
     ...(vessel !== undefined && { vessel }),
+    ...(of !== undefined && { of }),
   };
   const { makeExport } = await import('./files/make-export.ts');
   const request = { entries, people, span, format, zone, decimalMark, language };
@@ -97,15 +100,19 @@ async function runExport(
 async function runImport(
   { file }: Extract<Errand, { kind: 'import' }>,
   message: IncomingMessage,
-  { readFile, serve, say, settings }: Errands,
+  errands: Errands,
 ): Promise<Brought> {
+  const { readFile, serve, say, settings } = errands;
   const bytes = await readFile(file);
   if (bytes === undefined) return { said: [saying('import-no-file', { file }, message, say)] };
   const { readImport } = await import('./files/read-import.ts');
   const noting = { key: `import ${JSON.stringify([message.chat, message.id])}`, at: message.at, by: 1 };
   const read = await readImport(bytes, { reader: settings, noting });
-  const { said } = await serve({ ...message, id: `${message.id} file`, content: { kind: 'file', read } });
-  return { said };
+  const served = await serve({ ...message, id: `${message.id} file`, content: { kind: 'file', read } });
+  if (served.errand === undefined) return { said: served.said };
+  // A round in a file comes back with its sheet.
+  const brought = await runErrand(served.errand, served.message ?? message, errands);
+  return { ...brought, said: [...served.said, ...brought.said] };
 }
 
 async function runBackup(message: IncomingMessage, { store, backupPath, say }: Errands): Promise<Brought> {

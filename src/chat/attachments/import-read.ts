@@ -29,10 +29,24 @@ export interface ImportProblem {
   readonly about?: string;
 }
 
+/** Readings of several vessels in a file, as the lines that a message would have. */
+export interface RoundInFile {
+  readonly text: string;
+  readonly count: number;
+  /** A target, an addition or an additive asks for a dose; readings alone may be meant to be noted. */
+  readonly means: 'dose' | 'either';
+  /** What its sheet is made as. */
+  readonly format: 'csv' | 'xlsx';
+  /** Lines of the file that are no part of it, as they were not understood. */
+  readonly left: readonly number[];
+}
+
 /** What a file holds, to be shown before anything of it is taken. Beside a problem nothing can be taken. */
 export interface ImportRead {
-  /** Our own export, a plain list of vessels, or nothing that can be taken. */
-  readonly kind: 'log' | 'vessels' | 'nothing';
+  /** Our own export, a plain list of vessels, a round that is no such list, or nothing that can be taken. */
+  readonly kind: 'log' | 'vessels' | 'round' | 'nothing';
+  /** The lines of it that are a round of readings, whatever else it is. */
+  readonly round?: RoundInFile;
   /** In their order, with the numbers that the file has for them; those of a list of vessels count from 1. */
   readonly entries: readonly Entry[];
   /** Beside each entry the line it stands in. */

@@ -1,36 +1,76 @@
 import type { CellarView, Write } from '../../core/cellar/cellar-store.ts';
+import type { Button } from '../replies/reply.ts';
 import { fitImport, type FittedImport } from '../attachments/fit-import.ts';
 import { importLines, importProblemLines } from '../attachments/import-lines.ts';
 import type { ImportRead } from '../attachments/import-read.ts';
 import { buttonsFor } from './buttons.ts';
 import type { Here } from './here.ts';
-import { importKey } from './keys.ts';
+import { fileRoundKey, importKey } from './keys.ts';
 import { line } from './lines/line.ts';
 import { refAt } from './next-memory.ts';
 import type { Handled } from './ports.ts';
 import { replying } from './replying.ts';
+import { answerRoundOfFile } from './take-round-of-file.ts';
 
 /** So long a file that was shown can still be taken, in milliseconds. */
 const SHOWN_ms = 3_600_000;
 
-/** A file that was read: what was understood of it and what not is shown first; nothing is taken yet. */
+/**
+ * A file that was read. A round that asks for doses is answered with its sheet; for all else what was understood of it and
+ * what not is shown first, and nothing is taken yet.
+ */
 export async function handleFile(read: ImportRead, here: Here, view: CellarView): Promise<Handled> {
-  const { problems } = await fitted(read, here, view);
+  const { round } = read;
+  if (round?.means === 'dose') return answerRoundOfFile(round, 'dose', here, view);
+  const isList = read.kind !== 'round' && (round === undefined || here.role === 'keeper');
+  const { problems } = isList ? await fitted(read, here, view) : { problems: [] };
   if (problems.length > 0) return replying(here, { lines: importProblemLines(problems) });
   const ref = refAt(here);
   const next: Here = { ...here, memory: { ...here.memory, nextNumber: here.memory.nextNumber + 1 } };
   const { writes, ...said } = replying(next, {
-    lines: [...importLines(read), line('question', 'import-ask')],
-    buttons: buttonsFor(ref, ['i']),
+    lines:
+      round === undefined
+        ? [...importLines(read), line('question', 'import-ask')]
+        : [
+            line('first', 'file-round', { count: String(round.count) }),
+            ...(round.left.length === 0
+              ? []
+              : [line('first', 'file-round-left', { lines: round.left.slice(0, MOST_NAMED).join(', ') })]),
+            line('question', 'file-round-ask'),
+          ],
+    buttons: buttonsOf(ref, { isRound: round !== undefined, isList }),
   });
-  const until = here.message.at + SHOWN_ms;
+  const { chat, at } = here.message;
+  const until = at + SHOWN_ms;
   return {
     ...said,
     writes: [
-      { kind: 'keep', key: importKey(here.message.chat, ref), text: JSON.stringify(read), until },
+      ...(isList
+        ? [{ kind: 'keep', key: importKey(chat, ref), text: JSON.stringify(read), until } as const]
+        : []),
+      ...(round
+        ? [{ kind: 'keep', key: fileRoundKey(chat, ref), text: JSON.stringify(round), until } as const]
+        : []),
       ...writes,
     ],
   };
+}
+
+/** So many lines that were not understood are named. */
+const MOST_NAMED = 20;
+
+/** What may be done with a file: dose its round, note its readings, take its vessels. */
+function buttonsOf(
+  ref: string,
+  { isRound, isList }: { readonly isRound: boolean; readonly isList: boolean },
+): Button[] {
+  if (!isRound) return buttonsFor(ref, ['i']);
+  const all = [
+    { key: `fd:${ref}`, label: 'button-file-dose', values: {} },
+    { key: `fn:${ref}`, label: 'button-file-note', values: {} },
+    ...(isList ? [{ key: `i:${ref}`, label: 'button-file-vessels', values: {} }] : []),
+  ];
+  return all.map((one, at) => ({ ...one, mark: String(at + 1) }));
 }
 
 /** "Take it": all that was shown is noted, or nothing. */

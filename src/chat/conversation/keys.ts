@@ -64,6 +64,11 @@ export function importKey(chat: string, ref: string): string {
   return `import ${JSON.stringify([chat, ref])}`;
 }
 
+/** A round that came as a file, and may be dosed or noted. */
+export function fileRoundKey(chat: string, ref: string): string {
+  return `file round ${JSON.stringify([chat, ref])}`;
+}
+
 /** The last dose that was reckoned for a vessel. */
 export function planKey(vessel: string): string {
   return `plan ${vessel}`;

@@ -28,7 +28,7 @@ import type { Tag } from './words/words.ts';
 export const LONGEST_MESSAGE = 4096;
 
 /** More lines than a round has; own threshold. Above it the lines are one message, and refused as such. */
-const MOST_LINES = 300;
+export const MOST_LINES = 300;
 
 /** Tags of all words and phrases of some terms, shorter phrases inside longer ones included. */
 function cuesOf(terms: readonly Term[], lexicon: Lexicon): ReadonlySet<Tag> {
@@ -106,6 +106,22 @@ function readOne(board: Board, settings: ReaderSettings): Reading {
  * ```
  */
 export function readMessage(message: string, settings: ReaderSettings, waiting?: AwaitedField): Understood {
+  return readText(message, settings, { longest: LONGEST_MESSAGE, ...(waiting && { waiting }) });
+}
+
+/** The longest text that the lines of a sheet make: as many as a round may have, each as long as people write them. */
+const LONGEST_SHEET = 32_768;
+
+/** Reads the lines of a sheet that somebody sent as they would be read in a message, which has no room for so many. */
+export function readSheetText(lines: string, settings: ReaderSettings): Understood {
+  return readText(lines, settings, { longest: LONGEST_SHEET });
+}
+
+function readText(
+  message: string,
+  settings: ReaderSettings,
+  { longest, waiting }: { readonly longest: number; readonly waiting?: AwaitedField },
+): Understood {
   const text = withoutMentions(message);
   const decimalMark = /\d,\d{1,2}(?!\d)/.test(text) && !/\d\.\d/.test(text) ? ',' : '.';
   const understood = (
@@ -113,7 +129,7 @@ export function readMessage(message: string, settings: ReaderSettings, waiting?:
     shared = {},
     language = settings.language,
   ): Understood => ({ readings, shared, language, decimalMark });
-  if (text.length > LONGEST_MESSAGE) {
+  if (text.length > longest) {
     const danger = recogniseEmergency(foldText(text.slice(0, LONGEST_MESSAGE)).text, settings.language);
     return danger
       ? understood([emptyReading('emergency', { topic: danger.danger })], {}, danger.language)

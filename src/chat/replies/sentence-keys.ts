@@ -36,7 +36,6 @@ export interface SentenceValues {
   'assumed-additive': 'additive';
   'assumed-barrels': 'count' | 'volume';
   'assumed-gallon': 'gallon';
-  'assumed-law': never;
   'assumed-separator': never;
   'assumed-target': 'kind' | 'value';
   'assumed-target-red': 'kind' | 'value';
@@ -160,7 +159,7 @@ export interface SentenceValues {
   'demo-start-sheets': never;
   'designation-asked': 'region' | 'wine';
   'dose-at-limit':
-    'band' | 'class' | 'high' | 'least' | 'limit' | 'low' | 'now' | 'of' | 'organic' | 'region' | 'unit' | 'vessel' | 'what';
+    'band' | 'class' | 'high' | 'least' | 'limit' | 'low' | 'now' | 'of' | 'organic' | 'region' | 'standing' | 'unit' | 'vessel' | 'what';
   'dose-bottled': 'vessel';
   'dose-capped':
     'after' | 'band' | 'class' | 'high' | 'least' | 'limit' | 'list' | 'low' | 'of' | 'organic' | 'region' | 'unit' | 'what';
@@ -175,6 +174,7 @@ export interface SentenceValues {
   'dose-nothing': 'vessel';
   'dose-now': 'free' | 'molecular' | 'ph' | 'vessel';
   'dose-only-stock': 'additive' | 'amount' | 'count' | 'strength' | 'vessel';
+  'dose-over-already': 'region';
   'dose-rate': 'additive' | 'amount' | 'count' | 'dose' | 'per' | 'size' | 'strength' | 'unit' | 'vessel';
   'dose-rate-bare': 'dose' | 'vessel';
   'dose-rest-as-stock': 'additive' | 'amount' | 'count' | 'strength';
@@ -273,6 +273,7 @@ export interface SentenceValues {
   'export-remark': never;
   'export-reserve_mg_L': never;
   'export-stage': never;
+  'export-stock-left': never;
   'export-strength_of': never;
   'export-strength_percent': never;
   'export-struck-reason': never;
@@ -443,9 +444,11 @@ export interface SentenceValues {
   'landed-fell': 'added' | 'after' | 'before' | 'unit' | 'vessel';
   'landed-too-high': 'added' | 'rise' | 'unit' | 'vessel';
   'last-keeper': 'name';
+  'law-assumed': 'list';
   'law-decides': 'region';
   'law-note': 'code' | 'unit' | 'value';
   'law-of': 'region';
+  'law-unknown': 'code';
   'left-unread': 'count';
   'limit-amount': 'additive' | 'amount' | 'count' | 'left' | 'unit' | 'volume';
   'limit-care': never;

@@ -1,3 +1,4 @@
+import { additiveNames } from '../../chat/attachments/round/additive-names.ts';
 import { roundName } from '../../chat/attachments/round/round-name.ts';
 import { roundTable } from '../../chat/attachments/round/round-table.ts';
 import { roundWords, type SayLine } from '../../chat/attachments/round/round-words.ts';
@@ -14,9 +15,10 @@ export async function makeRoundFile(
   say: Say,
 ): Promise<BroughtFile> {
   const sayLine: SayLine = (line) => say({ language, lines: [line], buttons: [] }).text;
+  const nameOf = additiveNames(sayLine, sheet.mark);
   const table = roundTable(sheet, roundWords(sayLine), {
     sayLine,
-    additiveName: (additive) => sayLine({ room: 'first', key: 'sheet-additive-name', values: { additive } }),
+    nameOf: (id) => nameOf({ id }),
   });
   const bytes = format === 'csv' ? writeCsv(table, sheet.mark) : await writeXlsx(table);
   return { name: roundName(sheet.at, zone, { ending: format }), bytes };

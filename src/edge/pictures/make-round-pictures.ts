@@ -1,3 +1,4 @@
+import { additiveNames } from '../../chat/attachments/round/additive-names.ts';
 import { roundName } from '../../chat/attachments/round/round-name.ts';
 import { roundSvg } from '../../chat/attachments/round/round-svg.ts';
 import { roundTotals } from '../../chat/attachments/round/round-totals.ts';
@@ -23,7 +24,8 @@ export async function makeRoundPictures(
   const totals = roundTotals(sheet.rows).map((total) =>
     sayLine({ room: 'first', key: 'sheet-fetch', values: {}, list: [totalPart(total, sheet.mark)] }),
   );
-  const pages = shownPages(sheet, roundWords(sayLine), { telling: { zone, language, now }, totals });
+  const nameOf = additiveNames(sayLine, sheet.mark);
+  const pages = shownPages(sheet, roundWords(sayLine), { telling: { zone, language, now }, totals, nameOf });
   const files: BroughtFile[] = [];
   for (const [i, page] of pages.entries()) {
     const bytes = await drawPicture({ svg: roundSvg(page) });

@@ -2,6 +2,7 @@ import { expect, test } from 'vitest';
 import { DAY_ms } from '../../../src/core/time/durations.ts';
 import { FRESH_MEMORY } from '../../../src/chat/conversation/memory.ts';
 import { DEFAULT_SETTINGS, withUnits } from '../../../src/chat/conversation/settings.ts';
+import { MOST_ROWS, PHONE_COLUMNS, rowsOf } from '../../../src/chat/replies/fold.ts';
 import { say, startTalk, textOf } from './talk.ts';
 
 const FULL = 'T4 1450 gal pH 3.58 free 21';
@@ -73,13 +74,20 @@ test('who wants to stop a fermentation gets the figure, that it does not, and no
   expect(textOf(handled)).not.toMatch(/weigh/i);
 });
 
-test('a round of 30 vessels comes in two messages of a line each, cautions once', async () => {
+test('a round of 30 vessels is one screen; asked for, it comes in messages of a line each', async () => {
+  const talk = startTalk();
   const round = Array.from({ length: 30 }, (_, at) => `T${at + 1} 20 hl pH 3.4 free 15`).join('\n');
-  const { replies, answers } = await startTalk().write(round);
+  const said = await talk.write(round);
+  const screen = textOf(said);
+  expect(rowsOf(screen, PHONE_COLUMNS)).toBeLessThanOrEqual(MOST_ROWS);
+  // 15 → 31.9 mg/L in 2,000 L: 59 g each.
+  expect(screen.split('\n')[0]).toMatch(/^In all 1\.77 kg potassium metabisulfite: the 30 rounded amounts/);
+  expect(screen.match(/never lean into a tank/gi)).toHaveLength(1);
+  const { replies } = await talk.write('round');
+  const { answers } = said;
   const texts = replies.map((reply) => say(reply).text);
   expect(texts.map((text) => text.match(/^T\d+ \(/gm)?.length)).toEqual([25, 5]);
   for (const text of texts) expect(text).toMatch(/^Weigh potassium metabisulfite:$/m);
-  expect(texts.join('\n').match(/never lean into a tank/gi)).toHaveLength(1);
   expect(texts.join('\n').match(/if malolactic/gi)).toHaveLength(1);
   expect(answers).toHaveLength(30);
 });

@@ -9,6 +9,8 @@ export interface ShownRow {
   readonly amount: string;
   /** A word beside the amount: held back by a limit, nothing to add, the rest as a stock. */
   readonly aside: string;
+  /** Whether there is anything to tick. */
+  readonly isToDo: boolean;
 }
 
 /** A page of a weigh-out sheet in its words. */
@@ -77,11 +79,22 @@ const ruleAt = (y: number): string =>
   lineFrom({ x: LAYOUT.margin, y }, { x: LAYOUT.width - LAYOUT.margin, y }, { stroke: INK.grid });
 
 /**
+ * A box to tick.
+ *
+ * @param y in units of the picture
+ */
+function boxAt(y: number): string {
+  const { margin, row } = LAYOUT;
+  const look = { fill: 'none', stroke: INK.aside, 'stroke-width': '1.2' };
+  return element('rect', { x: at(margin), y: at(y), width: at(row.box), height: at(row.box), ...look });
+}
+
+/**
  * A row whose upper edge is at `top`.
  *
  * @param top in units of the picture
  */
-function drawRow({ name, facts, amount, aside }: ShownRow, top: number): string {
+function drawRow({ name, facts, amount, aside, isToDo }: ShownRow, top: number): string {
   const { width, margin, row } = LAYOUT;
   const right = width - margin;
   const left = margin + row.box + row.gap;
@@ -91,15 +104,7 @@ function drawRow({ name, facts, amount, aside }: ShownRow, top: number): string 
   const lower = top + 30;
   return [
     ruleAt(top),
-    element('rect', {
-      x: at(margin),
-      y: at(top + (row.height - row.box) / 2),
-      width: at(row.box),
-      height: at(row.box),
-      fill: 'none',
-      stroke: INK.aside,
-      'stroke-width': '1.2',
-    }),
+    isToDo ? boxAt(top + (row.height - row.box) / 2) : '',
     textAt({ x: left, y: upper }, fitText(name, { size: row.name, room }), { size: row.name }),
     textAt({ x: left, y: lower }, fitText(facts, { size: row.facts, room }), {
       size: row.facts,

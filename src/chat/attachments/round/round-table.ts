@@ -36,18 +36,18 @@ export type AdditiveNames = (id: AdditiveId) => string;
 export function roundTable(
   { rows }: Pick<RoundSheet, 'rows'>,
   words: RoundWords,
-  { sayLine, additiveName }: { readonly sayLine: SayLine; readonly additiveName: AdditiveNames },
+  { sayLine, nameOf }: { readonly sayLine: SayLine; readonly nameOf: AdditiveNames },
 ): Sheet {
   const done = rows.filter(({ is }) => is !== 'open');
   const open = rows.filter(({ is }) => is === 'open');
   const cells: Cells[] = [
-    ...done.flatMap((row) => cellsOf(row, additiveName, noteOf(row, words, sayLine))),
+    ...done.flatMap((row) => cellsOf(row, nameOf, noteOf(row, words, sayLine))),
     ...roundTotals(rows).map(({ additive, ...total }): Cells => ({
       vessel: words['in-all'],
       weigh: total.mass_g,
       measure: total.additive_volume_mL,
       tablets: total.tablets,
-      additive: additiveName(additive),
+      additive: nameOf(additive),
       strength: total.strength_percent,
     })),
     ...open.map((row): Cells => ({ ...factsOf(row, row.name), note: row.lines.map(sayLine).join(' ') })),
@@ -73,25 +73,31 @@ function noteOf({ is, lines, isLimited }: RoundRow, words: RoundWords, sayLine: 
 }
 
 /** A row for each vessel, and for tablets and the rest of their dose one each. */
-function cellsOf(row: RoundRow, additiveName: AdditiveNames, note: string): Cells[] {
+function cellsOf(row: RoundRow, nameOf: AdditiveNames, note: string): Cells[] {
   const names = row.vessels.length > 1 ? row.vessels.map(vesselName) : [row.name];
   return names.flatMap((name): Cells[] => {
     const facts = { ...factsOf(row, name), note };
     if (row.weighed.length === 0) return [facts];
     return row.weighed.map((one, at): Cells => ({
-      ...(at === 0 ? { ...facts, dose: row.dose_mg_L, after: row.free_after_mg_L } : { vessel: name }),
+      ...(at === 0
+        ? { ...facts, dose: rounded(row.dose_mg_L), after: rounded(row.free_after_mg_L) }
+        : { vessel: name }),
       ...amountOf(one),
-      additive: additiveName(one.additive.id),
+      additive: nameOf(one.additive.id),
       strength: one.additive.strength_percent,
     }));
   });
 }
 
+/** A computed figure to 0.1, for the eye: what is weighed stands beside it. */
+const rounded = (mg_L: number | undefined): number | undefined =>
+  mg_L === undefined ? undefined : Number(mg_L.toFixed(1));
+
 function factsOf({ vessels, volume_L, ph, free_mg_L, total_mg_L }: RoundRow, vessel: string): Cells {
   const each_L = volume_L === undefined ? undefined : volume_L / Math.max(1, vessels.length);
   return {
     vessel,
-    volume: each_L === undefined ? undefined : Number(each_L.toPrecision(12)),
+    volume: each_L === undefined ? undefined : Number(each_L.toFixed(1)),
     ph,
     free: free_mg_L,
     total: total_mg_L,

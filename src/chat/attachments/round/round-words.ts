@@ -7,6 +7,7 @@ export const ROUND_WORDS = [
   'volume',
   'ph',
   'free',
+  'free-short',
   'total',
   'dose',
   'weigh',

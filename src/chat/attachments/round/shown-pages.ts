@@ -1,3 +1,4 @@
+import type { AdditiveAtHand } from '../../../core/additives/additive-id.ts';
 import { dayText, type Telling } from '../../replies/moment-text.ts';
 import { numberText, type DecimalMark } from '../../replies/number-text.ts';
 import { measureText } from '../../replies/quantity-text.ts';
@@ -11,11 +12,18 @@ import type { RoundWords } from './round-words.ts';
 /** So many names without an amount stand under the last picture. */
 const MOST_NAMES = 12;
 
+/** How days are told, the totals as they are said, and how an additive is called. */
+export interface PageManner {
+  readonly telling: Telling;
+  readonly totals: readonly string[];
+  readonly nameOf: (additive: AdditiveAtHand) => string;
+}
+
 /** The pages of a sheet in words: the totals above the first, what has no amount under the last. */
 export function shownPages(
   sheet: RoundSheet,
   words: RoundWords,
-  { telling, totals }: { readonly telling: Telling; readonly totals: readonly string[] },
+  { telling, totals, nameOf }: PageManner,
 ): ShownPage[] {
   const pages = roundPages(sheet.rows);
   const open = sheet.rows.filter(({ is }) => is === 'open').map(({ name }) => name);
@@ -25,24 +33,34 @@ export function shownPages(
     title: words.title,
     corner: pages.length === 1 ? day : `${day} · ${at + 1}/${pages.length}`,
     totals: at === 0 ? totals : [],
-    rows: rows.map((row) => shownRow(row, words, sheet.mark)),
+    rows: rows.map((row) =>
+      shownRow(row, words, { mark: sheet.mark, nameOf: totals.length > 1 ? nameOf : () => '' }),
+    ),
     foot: [...(at === pages.length - 1 && open.length > 0 ? [`${words.open} ${names}`] : []), words.caution],
   }));
 }
 
-function shownRow(row: RoundRow, words: RoundWords, mark: DecimalMark): ShownRow {
+interface RowManner {
+  readonly mark: DecimalMark;
+  /** Says nothing where all rows take the same. */
+  readonly nameOf: (additive: AdditiveAtHand) => string;
+}
+
+function shownRow(row: RoundRow, words: RoundWords, { mark, nameOf }: RowManner): ShownRow {
   const [first, rest] = row.weighed;
   const count = first?.count ?? 1;
   const asides = [
     ...(row.isLimited ? [words.limit] : []),
     ...(count > 1 ? [`× ${count}`] : []),
-    ...(rest === undefined ? [] : [`+ ${amountText(rest, words, mark)}`]),
+    ...(first === undefined || first.measure.unit === 'tablets' ? [] : [nameOf(first.additive)]),
+    ...(rest === undefined ? [] : [`+ ${amountText(rest, words, mark)} ${nameOf(rest.additive)}`]),
   ];
   return {
     name: row.name,
-    facts: factsText(row, mark),
+    facts: factsText(row, words, mark),
     amount: first === undefined ? '' : amountText(first, words, mark),
-    aside: row.is === 'nothing' ? words.nothing : asides.join(' · '),
+    aside: row.is === 'nothing' ? words.nothing : asides.filter((one) => one !== '').join(' · '),
+    isToDo: row.is === 'amount',
   };
 }
 
@@ -51,7 +69,11 @@ function amountText({ measure }: Weighed, words: RoundWords, mark: DecimalMark):
   return measure.unit === 'tablets' ? `${text} ${words.tablets.toLowerCase()}` : text;
 }
 
-function factsText({ volume_L, volumeUnit, ph, free_mg_L, weighed }: RoundRow, mark: DecimalMark): string {
+function factsText(
+  { volume_L, volumeUnit, ph, free_mg_L, weighed }: RoundRow,
+  words: RoundWords,
+  mark: DecimalMark,
+): string {
   const count = weighed[0]?.count ?? 1;
   const volume =
     volume_L === undefined
@@ -59,7 +81,7 @@ function factsText({ volume_L, volumeUnit, ph, free_mg_L, weighed }: RoundRow, m
       : [volumeText(volume_L / count, volumeUnit ?? 'L', mark).replace(/\s\(.*\)$/, '')];
   return [
     ...volume,
-    ...(ph === undefined ? [] : [`pH ${numberText(ph, 2, mark)}`]),
-    ...(free_mg_L === undefined ? [] : [numberText(free_mg_L, 1, mark)]),
+    ...(ph === undefined ? [] : [`${words.ph} ${numberText(ph, 2, mark)}`]),
+    ...(free_mg_L === undefined ? [] : [`${words['free-short']} ${numberText(free_mg_L, 1, mark)}`]),
   ].join(' · ');
 }

@@ -44,8 +44,7 @@ const isWarning = ({ key }: Line): boolean => key.startsWith('warning-');
 
 /** Each row in its line; what a warning is about stands above it. */
 export function linesOf(rows: readonly RoundRow[]): Line[] {
-  const lines = rows.flatMap((row) => row.lines);
-  return [...lines.filter((one) => !isWarning(one)), ...lines.filter(isWarning)];
+  return rows.flatMap(({ lines }) => [...lines.filter((one) => !isWarning(one)), ...lines.filter(isWarning)]);
 }
 
 /** What has no amount, under a heading of its own: nothing of it is in the totals. */
@@ -73,8 +72,10 @@ function warnedLine(warned: readonly RoundRow[]): Line[] {
 export function totalLines(rows: readonly RoundRow[], mark: DecimalMark): Line[] {
   const amounts = rows.filter(({ is }) => is === 'amount');
   const count = amounts.flatMap(({ weighed }) => weighed).reduce((sum, one) => sum + one.count, 0);
-  if (count < 2) return [];
-  const list = roundTotals(rows).map((total) => totalPart(total, mark));
+  const totals = roundTotals(rows);
+  // Where each additive is measured once, its line has all of it.
+  if (count <= totals.length) return [];
+  const list = totals.map((total) => totalPart(total, mark));
   return listLine('first', 'round-total', list).map((one) => ({ ...one, values: { count: String(count) } }));
 }
 

@@ -1,4 +1,5 @@
 import type { Reading } from '../../reader/understood.ts';
+import { vesselNames } from '../../replies/vessel-name.ts';
 
 /** More of a person's words than this would push the answer off its line. */
 const LONGEST = 24;
@@ -15,9 +16,8 @@ export function vesselText(reading: Reading): string {
 }
 
 function vesselsText(reading: Reading, vessels: readonly string[]): string {
-  const [first = 'none'] = vessels;
-  const last = vessels.at(-1) ?? first;
-  return asName(reading.where.vessels?.text ?? `${first}–${last}`, `${first}–${last}`);
+  const short = vesselNames(vessels);
+  return asName(reading.where.vessels?.text ?? short, short);
 }
 
 function asName(written: string, otherwise: string): string {

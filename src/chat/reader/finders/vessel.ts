@@ -1,5 +1,5 @@
 import type { Board } from '../board.ts';
-import { claim, find, hasTag, isCue, isFree, isMark, refuse, termAt } from '../board.ts';
+import { claim, find, hasTag, isCue, isFree, isMark, refuse, saysMany, termAt } from '../board.ts';
 import { MASS_UNITS, VOLUME_UNITS, concentrationAt, unitAt } from '../units.ts';
 
 /** One vessel as it stands in the text. */
@@ -130,7 +130,7 @@ function rangeEnd(board: Board, first: Named): { number: number; to: number } | 
   const isMinus = isMark(board, k, '-') && termAt(board, k).gap && board.terms[k + 1]?.gap === false;
   if (!joins || isMinus || first.number === undefined) return undefined;
   // `moved T4 to T9`: out of one and into the other.
-  const isOne = !termAt(board, first.from).text.endsWith('s');
+  const isOne = !saysMany(termAt(board, first.from));
   if (isOne && isCue(board, k, 'to') && board.pieces.some(({ ids }) => ids.includes('moved')))
     return undefined;
   const at = isMark(board, k, '.') ? k + 2 : k + 1;
@@ -138,7 +138,7 @@ function rangeEnd(board: Board, first: Named): { number: number; to: number } | 
   if (second?.number !== undefined && second.kind === first.kind)
     return { number: second.number, to: second.to };
   const glued = isMark(board, k, '-') && !termAt(board, k).gap && !termAt(board, k + 1).gap;
-  const plural = termAt(board, first.from).text.endsWith('s') || glued;
+  const plural = saysMany(termAt(board, first.from)) || glued;
   if (
     plural &&
     isWholeAt(board, at) &&
@@ -150,23 +150,61 @@ function rangeEnd(board: Board, first: Named): { number: number; to: number } | 
   return undefined;
 }
 
-function findRange(board: Board, first: Named, last: { number: number; to: number }): void {
+/** Finds a row of vessels, and what is left out of it; gives the term that it ends with. */
+function findRange(board: Board, first: Named, last: { number: number; to: number }): number {
   const from = first.number ?? 0;
   if (last.number <= from || last.number - from > 499) {
     refuse(board, 'ambiguous-number', first.from, last.to);
-    return;
+    return last.to;
   }
   const prefix = /^(tank|barrel|[A-Z]+ )/.test(first.name)
     ? `${first.name.slice(0, first.name.lastIndexOf(String(from)))}`
     : first.kind;
+  const left = leftOut(board, first, last.to);
+  const numbers = Array.from({ length: last.number - from + 1 }, (_, k) => from + k);
+  const kept = numbers.filter((number) => !left.numbers.includes(number));
+  if (left.numbers.some((number) => !numbers.includes(number)) || kept.length < 2) {
+    refuse(board, 'ambiguous-number', first.from, left.to);
+    return left.to;
+  }
   find(
     board,
     'vessels',
-    Array.from({ length: last.number - from + 1 }, (_, k) => `${prefix}${from + k}`),
+    kept.map((number) => `${prefix}${number}`),
     'labelled',
     first.from,
-    last.to,
+    left.to,
   );
+  return left.to;
+}
+
+/** `B1-B24 without B7 and B9`, `except B7-B9`, `but not 7`: the numbers that are left out of a row, and where they end. */
+function leftOut(board: Board, first: Named, to: number): { numbers: readonly number[]; to: number } {
+  const numbers: number[] = [];
+  let end = to;
+  let k = isMark(board, to + 1, '(') || isMark(board, to + 1, ',') ? to + 2 : to + 1;
+  if (!isCue(board, k, 'except')) return { numbers, to };
+  const isBracketed = isMark(board, to + 1, '(');
+  for (k += 1; ; k += 1) {
+    const named = board.terms[k]?.kind === 'word' ? (worded(board, k) ?? coded(board, k)) : undefined;
+    const isBare =
+      isWholeAt(board, k) && !hasOwnUnit(board, k) && (numbers.length === 0 || isCue(board, k - 1, 'and'));
+    const one =
+      named?.number !== undefined && named.kind === first.kind
+        ? { number: named.number, to: named.to }
+        : isBare
+          ? { number: Number(termAt(board, k).text), to: k }
+          : undefined;
+    if (one === undefined) break;
+    const last = named === undefined ? undefined : rangeEnd(board, named);
+    for (let number = one.number; number <= (last?.number ?? one.number); number += 1) numbers.push(number);
+    end = last?.to ?? one.to;
+    const joins = isMark(board, end + 1, ',') || isCue(board, end + 1, 'and');
+    if (!joins) break;
+    k = end + 1;
+  }
+  if (isBracketed && isMark(board, end + 1, ')')) end += 1;
+  return { numbers, to: end };
 }
 
 /** Finds the vessel: a tank or barrel word with its number, or a code; `B1-B24` is that many vessels. */
@@ -176,11 +214,12 @@ export function findVessel(board: Board): void {
     const named = worded(board, i) ?? coded(board, i);
     if (!named) continue;
     const last = rangeEnd(board, named);
-    if (last) findRange(board, named, last);
-    else {
-      find(board, 'vessel', named.name, 'labelled', named.from, named.to);
-      if (kindOf(board, i - 1) === 'tank' || kindOf(board, i - 1) === 'barrel') claim(board, i - 1, i - 1);
+    if (last) {
+      i = findRange(board, named, last);
+      continue;
     }
-    i = (last ?? named).to;
+    find(board, 'vessel', named.name, 'labelled', named.from, named.to);
+    if (kindOf(board, i - 1) === 'tank' || kindOf(board, i - 1) === 'barrel') claim(board, i - 1, i - 1);
+    i = named.to;
   }
 }

@@ -341,6 +341,16 @@ export const en: Words = {
       'sulphite soln', 'bisulphite soln',
     ],
     'cue:per-barrel': ['per barrel', 'per bbl'],
+    'cue:yield': ['yield', 'yields', 'yielding', 'press yield', 'yield of', 'a yield of', 'expected yield', 'yield is'],
+    'cue:fruit-sound': ['sound', 'sound fruit', 'sound grapes', 'healthy', 'healthy fruit', 'healthy grapes'],
+    'cue:fruit-damaged': [
+      'damaged', 'some damage', 'damage', 'damaged fruit', 'damaged grapes', 'bruised', 'split berries', 'broken berries', 'hail damage',
+      'bird damage', 'sunburnt', 'sunburned',
+    ],
+    'cue:fruit-rot': [
+      'rot', 'rotten', 'some rot', 'grey rot', 'gray rot', 'sour rot', 'noble rot', 'botrytis', 'botrytised', 'botrytized', 'mould', 'mold',
+      'mouldy', 'moldy',
+    ],
     'cue:rises-too': ['rose'],
     'cue:tap-too': ['port'],
     'cue:should': ['should be', 'needs to be', 'need to be', 'must be', 'ought to be', 'has to be', 'wants to be', 'should read', 'should sit at', 'should go to', 'wanted at', 'supposed to be', 'to be'],
@@ -348,6 +358,8 @@ export const en: Words = {
     'cue:sample-word': ['sample', 'samples', 'aliquot', 'titrated', 'titrant', 'burette', 'pipette', 'pipetted', 'took', 'bottle', 'bottles', 'used', 'ripper', 'drawn', 'vial', 'vials', 'beaker', 'flask'],
     'cue:past-time': ['this morning', 'yesterday', 'last night', 'earlier', 'already', 'earlier today', 'this afternoon', 'an hour ago', 'last week', 'before lunch', 'after lunch', 'ago'],
     'cue:put': ['put'],
+    'cue:only-done': ['done'],
+    'cue:at-strength': ['at'],
     'cue:bag': ['bag of', 'bags of', 'sack of', 'sacks of', 'box of', 'boxes of', 'pail of', 'drum of', 'bags', 'sacks'],
     'cue:buy': ['order', 'buy', 'bought', 'ordered', 'invoice', 'invoiced', 'delivered', 'delivery', 'purchase', 'received', 'ship', 'shipped'],
     'cue:lately': ['dropped from', 'fell from', 'went from', 'down from', 'came down from', 'gone from', 'has gone from'],
@@ -577,6 +589,22 @@ export const en: Words = {
     'lab-blank': ['blank'],
     'lab-ascorbic': ['ascorbic', 'ascorbic acid', 'vitamin c'],
     'lab-normal': ['n', 'normal', 'normality'],
+    'lab-range': [
+      'range', 'how sure', 'how sure are you', 'how sure is it', 'how sure is that', 'how sure is the dose', 'how accurate', 'how accurate is that', 'how exact is that',
+      'how exact', 'uncertainty', 'error range', 'margin of error', 'plus minus', 'plus or minus', 'with range', 'as a range', 'dose range', 'confidence',
+    ],
+    'lab-table': ['table', 'tables', 'free table', 'so2 table', 'table of free so2', 'free so2 table', 'ph table', 'molecular table'],
+    'lab-molecular': ['molecular', 'mol', 'molecular so2', 'both bases', 'bases'],
+    'lab-so2': ['so2', 'free', 'free so2', 'sulfite', 'sulphite', 'needed', 'need', 'total', 'total so2'],
+    'lab-forecast': [
+      'forecast', 'outlook', 'prognosis', 'prediction', 'how long will it last', 'how long does it last', 'how long will it hold', 'next addition', 'when is the next addition',
+      'when will it need', 'when does it need', 'when will it fall', 'when does it fall below', 'when next', 'when will the next addition be', 'when is it next', 'when to add next', 'how long will so2 last', 'how long until',
+    ],
+    'lab-blend': ['blend', 'blending', 'which blend', 'blend it', 'mix', 'blend options', 'blend down'],
+    'lab-too-much': [
+      'too much', 'too high', 'too much so2', 'too much sulfite', 'too much sulphite', 'so2 too high', 'free too high', 'total too high', 'free so2 too high', 'total so2 too high', 'overdosed',
+      'overdose', 'over dosed', 'oversulfited', 'over sulfited', 'over the limit', 'bring down', 'bring it down', 'lower', 'reduce', 'get rid of', 'lower so2', 'reduce so2', 'what now',
+    ],
     'lab-molar': ['m', 'molar', 'molarity'],
     filler: [
       'please', 'pls', 'plz', 'thanks', 'thank you', 'thx', 'hi', 'hello', 'hey', 'ok', 'okay', 'bot', 'the', 'a', 'an', 'my',

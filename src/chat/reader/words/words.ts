@@ -29,7 +29,7 @@ export type CueId =
   | 'fruit' | 'wine' | 'verb' | 'pronoun' | 'month' | 'lot' | 'variety'
   | 'greeting' | 'thanks' | 'help' | 'cellar' | 'plain' | 'potassium' | 'sodium' | 'yet'
   | 'percent' | 'please' | 'in-store' | 'into' | 'clock-before' | 'no' | 'states' | 'plus' | 'times' | 'wick'
-  | 'except' | 'mixed-sample' | 'should' | 'fullness' | 'share-word' | 'limit' | 'sample-word' | 'past-time' | 'put' | 'lately' | 'bag' | 'buy' | 'in-water-name' | 'solution-name' | 'per-barrel' | 'rises-too' | 'tap-too' | 'from-too' | 'add-behind' | 'past-if-accented' | 'only-done' | 'one' | 'many'
+  | 'except' | 'mixed-sample' | 'should' | 'fullness' | 'share-word' | 'limit' | 'sample-word' | 'past-time' | 'put' | 'lately' | 'bag' | 'buy' | 'in-water-name' | 'solution-name' | 'per-barrel' | 'yield' | 'fruit-sound' | 'fruit-damaged' | 'fruit-rot' | 'rises-too' | 'tap-too' | 'from-too' | 'add-behind' | 'past-if-accented' | 'only-done' | 'also-at' | 'at-strength' | 'one' | 'many'
   | 'designated' | 'declared-year' | 'density' | 'density-unit' | 'undeclared-year' | 'quality' | 'other-sparkling' | 'pdo' | 'bulk' | 'keep' | 'bottling' | 'bottling-reserve'; // prettier-ignore
 
 /** What a word is. */
@@ -73,6 +73,7 @@ export type OwnWordId =
   | 'cellar-is' | 'name-cellar' | 'read-along' | 'only-called'
   | 'stock' | 'in-store' | 'how-much' | 'received' | 'used-up' | 'discarded' | 'counted' | 'supplier' | 'for-equipment'
   | 'lab-aeration' | 'lab-iodine' | 'lab-naoh' | 'lab-iodate' | 'lab-titration' | 'lab-sample' | 'lab-titrant' | 'lab-blank' | 'lab-ascorbic' | 'lab-normal' | 'lab-molar'
+  | 'lab-range' | 'lab-table' | 'lab-molecular' | 'lab-so2' | 'lab-forecast' | 'lab-blend' | 'lab-too-much'
   | 'count-half' | 'count-1' | 'count-2' | 'count-3' | 'count-4' | 'count-5' | 'count-6'; // prettier-ignore
 
 /** The plain questions about the trade that people ask again and again. */
