@@ -97,6 +97,10 @@ export const isCue = (board: Board, i: number, cue: CueId): boolean => hasTag(bo
 /** Whether the message holds a cue anywhere. */
 export const holdsCue = (board: Board, cue: CueId): boolean => board.cues.has(`cue:${cue}`);
 
+/** Whether a word names more than one: by its ending, or as its language's list says. */
+export const saysMany = ({ text, tags }: Term): boolean =>
+  tags.includes('cue:many') || (text.endsWith('s') && !tags.includes('cue:one'));
+
 /** Whether term `i` is that mark. */
 export const isMark = (board: Board, i: number, mark: string): boolean => {
   const term = board.terms[i];

@@ -3,6 +3,7 @@ import { elides, phrasesOf } from './spellings.ts';
 import { tellLanguages } from './tell-languages.ts';
 import type { Language } from './understood.ts';
 import { ALL_WORDS } from './words/all.ts';
+import { COMMON } from './words/common.ts';
 import type { OwnWordId, Tag, Words } from './words/words.ts';
 
 /** What is known of a word or phrase: its tags. */
@@ -101,10 +102,10 @@ function ownOf(lists: readonly Words[]): Map<string, OwnPhrase[]> {
  * ```
  */
 export function buildLexicon(lists: readonly Words[], { names = [], isTold = true }: Making = {}): Lexicon {
-  const phrases = new Map<string, { readonly tags: Tag[]; readonly of: Language | 'names' }>();
+  const phrases = new Map<string, { readonly tags: Tag[]; readonly of: Language | 'common' | 'names' }>();
   const longest = new Map<string, number>();
   const neverMended = new Set(lists.flatMap((list) => list.neverMended ?? []));
-  const add = (phrase: string, tag: Tag, of: Language | 'names'): void => {
+  const add = (phrase: string, tag: Tag, of: Language | 'common' | 'names'): void => {
     const entry = phrases.get(phrase);
     if (entry) {
       if (entry.of === of && !entry.tags.includes(tag)) entry.tags.push(tag);
@@ -121,12 +122,18 @@ export function buildLexicon(lists: readonly Words[], { names = [], isTold = tru
       for (const entry of entries)
         for (const phrase of phrasesOf(entry, language)) add(phrase, tag, language);
   }
+  // English has all of it, with meanings of its own (`k`, `bar`).
+  if (lists[0] !== undefined && lists[0].language !== 'en')
+    for (const [tag, entries] of Object.entries(COMMON) as [Tag, readonly string[]][])
+      for (const phrase of entries)
+        if (phrases.get(phrase)?.of !== lists[0].language) add(phrase, tag, 'common');
   for (const { language, says } of names) {
     for (const [tag, entries] of Object.entries(says) as [Tag, readonly string[]][]) {
       if (!NAMES.test(tag)) continue;
       for (const entry of entries)
         for (const phrase of phrasesOf(entry, language))
-          if (phrase.length >= SHORTEST_NAME && !neverMended.has(phrase)) add(phrase, tag, 'names');
+          if ((phrase.length >= SHORTEST_NAME || /\d/.test(phrase)) && !neverMended.has(phrase))
+            add(phrase, tag, 'names');
     }
   }
   const formulas = new Map<string, string[]>();

@@ -1,6 +1,7 @@
 import { phrasesOf } from './spellings.ts';
 import type { Language } from './understood.ts';
 import { ALL_WORDS } from './words/all.ts';
+import { COMMON } from './words/common.ts';
 import type { Tag, Words } from './words/words.ts';
 
 /** In which languages a message is written. */
@@ -13,8 +14,8 @@ export interface ToldLanguages {
   readonly isTold: boolean;
 }
 
-/** Names and figures that are the same everywhere tell no language. */
-const TELLS_NONE = /^(cue:variety|unit:(L|mL|cL|hL|m3|g|mg|kg|ppm|mg\/L|C|F|none-of-ours)$)/;
+/** Names that are the same everywhere tell no language, nor does what is written alike in all. */
+const TELLS_NONE = /^cue:variety$/;
 
 /** The languages that have a word, a bit each; a word of more languages tells less. */
 function languagesOfWords(lists: readonly Words[]): ReadonlyMap<string, number> {
@@ -31,6 +32,7 @@ function languagesOfWords(lists: readonly Words[]): ReadonlyMap<string, number> 
     for (const entries of Object.values(own)) add(entries);
     add(neverMended);
   }
+  for (const entries of Object.values(COMMON)) for (const entry of entries) known.delete(entry);
   return known;
 }
 
@@ -38,6 +40,9 @@ let known: ReadonlyMap<string, number> | undefined;
 
 /** Built when the first message comes. */
 const knownWords = (): ReadonlyMap<string, number> => (known ??= languagesOfWords(ALL_WORDS));
+
+/** From this length one word alone tells a second language; own threshold. */
+const CLEAR_LENGTH = 6;
 
 const WORD = /\p{L}+/gu;
 
@@ -68,8 +73,11 @@ export function tellLanguages(text: string, chat: Language): ToldLanguages {
   const scores = ALL_WORDS.map(({ language }, n) => ({ language, n, score: scoreOf(n) }));
   const own = scores.find(({ language }) => language === chat);
   const best = scores.reduce((a, b) => (b.score > a.score + 1e-9 ? b : a), own ?? scores[0]!);
-  const isMissing = (n: number): boolean =>
-    words.some((word) => word.length > 2 && knownWords().get(word) === 1 << n);
+  // One short word may be anything: a name, a slip.
+  const isMissing = (n: number): boolean => {
+    const only = new Set(words.filter((word) => word.length > 2 && knownWords().get(word) === 1 << n));
+    return only.size > 1 || [...only].some(({ length }) => length >= CLEAR_LENGTH);
+  };
   const others = scores.filter(({ n }) => n !== best.n && isMissing(n)).map(({ language }) => language);
   return { first: best.language, others, isTold: best.score > 0 };
 }

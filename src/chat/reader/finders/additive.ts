@@ -72,7 +72,7 @@ function strengthNear(board: Board, i: number): StrengthAt | undefined {
   for (let k = i + 1; k <= i + 3; k++) {
     const found = strengthFrom(board, k);
     if (found) return found;
-    if (!joins(board, k)) break;
+    if (!joins(board, k) && !isCue(board, k, 'at-strength')) break;
   }
   return undefined;
 }

@@ -10,6 +10,7 @@ import {
   isFree,
   isMark,
   refuse,
+  saysMany,
   termAt,
   isLabelled,
 } from '../board.ts';
@@ -123,7 +124,7 @@ function keep(board: Board, count: number, volume_L: number, from: number, to: n
 
 /** `2 tanks of 40 hl each`; without "each" or "in all" nobody knows. */
 function findTanks(board: Board, i: number): void {
-  const isTanks = hasTag(board, i + 1, 'vessel:tank') && termAt(board, i + 1).text.endsWith('s');
+  const isTanks = hasTag(board, i + 1, 'vessel:tank') && saysMany(termAt(board, i + 1));
   const count = figureAt(board, i).value;
   if (
     !isTanks ||
@@ -157,7 +158,7 @@ export function findBarrels(board: Board): void {
     else if (board.taken[i] !== true && termAt(board, i).kind === 'word') {
       if (isBarrel(board, i) && !isFound(board, 'vessel') && !isFound(board, 'vessels')) {
         const size = sizeAt(board, i + 1, false);
-        if (!size && board.marks.barrelsAssumed_L === undefined && !termAt(board, i).text.endsWith('s'))
+        if (!size && board.marks.barrelsAssumed_L === undefined && !saysMany(termAt(board, i)))
           board.marks.barrelsAssumed_L = USUAL_BARREL_L;
       }
       if (hasTag(board, i, 'vessel:cask')) board.marks.casksWithoutSize = true;

@@ -1,5 +1,5 @@
 import type { Board } from '../board.ts';
-import { holdsCue, isCue, isMark } from '../board.ts';
+import { holdsCue, isCue, isFree, isMark, placeOf, refuse, termAt } from '../board.ts';
 
 /** Whether a cue stands somewhere between two terms. */
 function cueBetween(
@@ -19,6 +19,25 @@ const saysNo = (board: Board, i: number): boolean => [i - 1, i - 2, i - 3].some(
 const declines = (board: Board, i: number): boolean =>
   isCue(board, isCue(board, i - 1, 'to') ? i - 2 : i - 1, 'not');
 
+const isWrittenWithAccent = (board: Board, i: number): boolean =>
+  /\P{ASCII}/u.test(placeOf(board, i, i).text);
+
+/** `ajouté` is past; without its accent it may be `ajoute`. */
+const isPast = (board: Board, i: number): boolean =>
+  isCue(board, i, 'past') || (isCue(board, i, 'past-if-accented') && isWrittenWithAccent(board, i));
+
+/** In English the order of words tells a question; elsewhere it may be the mark alone. */
+const isQuestion = (board: Board): boolean =>
+  board.lexicon.language !== 'en' && isMark(board, board.terms.length - 1, '?');
+
+/** The verb that leaves open whether something was done or is to be done, in a message without any accent. */
+function findUnclearVerb(board: Board): void {
+  const at = board.terms.findIndex((_, i) => isCue(board, i, 'past-if-accented') && isCue(board, i, 'add'));
+  if (at < 0 || /\P{ASCII}/u.test(board.message) || !board.terms.some((_, i) => isFree(board, i))) return;
+  if (isCue(board, at - 1, 'pronoun') || termAt(board, at).text.includes("'")) return;
+  refuse(board, 'ambiguous-number', at, at);
+}
+
 /** Whether the verb at term `i` tells what was done: neither asked, negated, conditional nor still to come. */
 export function isToldAsFact(board: Board, i: number): boolean {
   const first = board.terms.findIndex(({ kind }) => kind === 'word');
@@ -26,6 +45,7 @@ export function isToldAsFact(board: Board, i: number): boolean {
   return (
     !asks &&
     !isMark(board, i + 1, '?') &&
+    !isQuestion(board) &&
     !cueBetween(board, i - 5, i, 'not') &&
     !saysNo(board, i) &&
     !cueBetween(board, 0, i, 'if') &&
@@ -42,8 +62,9 @@ export function findPastTense(board: Board): void {
   const said = board.terms.findIndex(
     (_, i) =>
       board.taken[i] !== true &&
-      (isCue(board, i, 'past') || (isCue(board, i, 'put') && holdsCue(board, 'past-time'))),
+      (isPast(board, i) || (isCue(board, i, 'put') && holdsCue(board, 'past-time'))),
   );
+  if (said < 0 && !declined && !board.pastTense) findUnclearVerb(board);
   if (said < 0 || declined) return;
   board.pastTense = isToldAsFact(board, said);
   const negated = cueBetween(board, said - 5, said, 'not') || saysNo(board, said);

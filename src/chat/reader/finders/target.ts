@@ -43,12 +43,21 @@ const declines = (board: Board, i: number): boolean =>
   isCue(board, i - 1, 'not') ||
   (isCue(board, i - 2, 'not') && (isCue(board, i - 1, 'to') || isCue(board, i - 1, 'verb')));
 
+/** `2000 l a pH 3,55`, `à 18 de libre`: a word that says "at" as well as "to"; of a level nobody can tell which. */
+function isAt(board: Board, i: number, { aim, label }: { aim: Aim; label?: Aim['kind'] }): boolean {
+  if (!isCue(board, i, 'also-at') || isStranger(board, i - 1)) return false;
+  if (label === 'ph' || aim.kind === 'ph') return true;
+  if (isCellarTalk(board)) refuse(board, 'ambiguous-number', i, aim.to);
+  return true;
+}
+
 function findVerb(board: Board, i: number): void {
   if (isCue(board, i, 'need') && isCue(board, i + 1, 'to')) return;
   const found = governed(board, i);
   if (!found) return;
   const { aim, label, leadsTo } = found;
   if (isCue(board, i, 'need') && label === 'ph') return;
+  if (isAt(board, i, found)) return;
   if (declines(board, i)) return refuse(board, 'ambiguous-number', i - 1, aim.to);
   if (hasTag(board, i - 1, 'label:ph')) return refuse(board, 'ambiguous-number', i - 1, aim.to);
   if (!isClear(board, i, found)) {

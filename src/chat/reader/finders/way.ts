@@ -37,8 +37,9 @@ function findWayAt(board: Board, i: number): boolean {
     arrow ||
     [first, second].some(({ from }) => concentrationAt(board, from + 1) !== undefined);
   if (!firm && !isCellarTalk(board)) return false;
-  const said = isCue(board, i - 1, 'from') || isCue(board, labelAt - 1, 'from');
-  const start = isCue(board, i - 1, 'from') ? i - 1 : before ? labelAt : i;
+  const isFrom = (k: number): boolean => isCue(board, k, 'from') || isCue(board, k, 'from-too');
+  const said = isFrom(i - 1) || isFrom(labelAt - 1);
+  const start = isFrom(i - 1) ? i - 1 : before ? labelAt : i;
   if (second.kind === 'molecular') {
     find(board, 'free_mg_L', first.mg_L, 'labelled', start, first.to);
     keepTarget(board, second, joint);

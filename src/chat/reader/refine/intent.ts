@@ -53,7 +53,7 @@ function isAdded(board: Board): boolean {
     any(board, 'added_mg_L', 'rate_mg_L') ||
     refused(board, 'unknown-additive') ||
     refused(board, 'ambiguous-number');
-  const isOnlyDone = !board.terms.some((term, i) => isCue(board, i, 'past') && term.text !== 'done');
+  const isOnlyDone = !board.terms.some((_, i) => isCue(board, i, 'past') && !isCue(board, i, 'only-done'));
   return (
     said ||
     (hasAdditive(board) && !isOnlyDone) ||
@@ -131,6 +131,7 @@ function isDose(board: Board): boolean {
     any(board, 'volume_L') ||
     board.marks.barrelsCounted === true ||
     board.marks.fruitByWeight === true ||
+    board.marks.yield_L_per_100_kg !== undefined ||
     (board.marks.casksWithoutSize === true && any(board, 'stage', 'style'))
   )
     return !moves;

@@ -9,6 +9,7 @@ import {
   isMark,
   placeOf,
   refuse,
+  saysMany,
   setAside,
   termAt,
 } from '../board.ts';
@@ -82,6 +83,23 @@ function findPh(board: Board, candidates: readonly number[]): void {
   find(board, 'ph', decimalAt(board, i).value, 'bare', i, i);
 }
 
+/** Words that say that something was or is to be added: then a figure that nothing names is no reading. */
+const speaksOfAdding = (board: Board): boolean =>
+  board.lexicon.language !== 'en' &&
+  board.terms.some((_, i) =>
+    (['past', 'past-if-accented', 'add', 'add-behind', 'raise'] as const).some((cue) => isCue(board, i, cue)),
+  );
+
+/** A word in small letters that no list knows: in a language that is not read in full it may be the verb. */
+const holdsUnknownVerb = (board: Board): boolean =>
+  (board.lexicon.language !== 'en' || !board.lexicon.isTold) &&
+  board.terms.some(
+    (_, i) =>
+      isStranger(board, i) && termAt(board, i).text.length > 3 && /^\p{Ll}/u.test(placeOf(board, i, i).text),
+  );
+
+const isNegated = ({ notes }: Board): boolean => notes.some(({ id }) => id === 'negated');
+
 function findFree(board: Board, candidates: readonly number[]): void {
   const left = candidates.filter((i) => isFree(board, i));
   const vintage = left.find((i) => mayBeVintage(board, i));
@@ -95,12 +113,17 @@ function findFree(board: Board, candidates: readonly number[]): void {
     return findFree(board, candidates);
   }
   if (left.length === 0) return;
+  if (isNegated(board) && speaksOfAdding(board)) {
+    for (const i of left) if (isFree(board, i)) setAside(board, i, concentrationAt(board, i + 1)?.to ?? i);
+    return;
+  }
   const only =
     left.length === 1 || new Set(left.map((i) => figureAt(board, i).value)).size === 1 ? left[0] : undefined;
   const isTaken = isFound(board, 'free_mg_L') || isFound(board, 'added_mg_L');
   const figure = only === undefined ? undefined : figureAt(board, only);
   const unit = only === undefined ? undefined : concentrationAt(board, only + 1);
   const fine =
+    !speaksOfAdding(board) && !((unit !== undefined || !board.lexicon.isTold) && holdsUnknownVerb(board)) &&
     only !== undefined && figure !== undefined && !isTaken && rangeEnd(board, only) === undefined && !isAfterInto(board, only) && !isAfterArticle(board, only) && !mayGoIn(board, only) &&
     vintage === undefined && !isMark(board, only + 1, '/') && !isMark(board, only - 1, '/') && figure.value <= MOST_UNLABELLED_FREE_mg_L && (isWhole(board, only) || unit !== undefined) && unit?.id !== 'g/L'; // prettier-ignore
   if (fine && figure.value < 0) return refuse(board, 'negative-value', figure.from, only);
@@ -165,7 +188,7 @@ function setCountsAside(board: Board): void {
     if (
       isFree(board, i) &&
       isWhole(board, i) &&
-      termAt(board, i + 1).text.endsWith('s') &&
+      saysMany(termAt(board, i + 1)) &&
       termAt(board, i + 1).tags.some((tag) => tag === 'vessel:tank' || tag === 'vessel:other')
     )
       setAside(board, i, i + 1);

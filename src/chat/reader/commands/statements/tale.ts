@@ -1,5 +1,5 @@
 import type { Board, Finding } from '../../board.ts';
-import { freshBoard } from '../../board.ts';
+import { freshBoard, saysMany } from '../../board.ts';
 import { findKind } from '../../finders/kind.ts';
 import { findLawFacts } from '../../finders/law-facts.ts';
 import { findStage } from '../../finders/stage.ts';
@@ -32,9 +32,7 @@ const isStop = ({ kind, text, gap }: Piece): boolean =>
 /** `moved T4 to T9` names two vessels and no six: where wine goes somewhere, "to" joins no range of single vessels. */
 function apart({ terms, pieces }: Board): readonly Term[] {
   const goes = pieces.some(({ ids }) => ids.some((id) => GOES.has(id)));
-  const isMany = terms.some(
-    ({ text, tags }) => text.endsWith('s') && tags.some((tag) => tag.startsWith('vessel:')),
-  );
+  const isMany = terms.some((term) => saysMany(term) && term.tags.some((tag) => tag.startsWith('vessel:')));
   if (!goes || isMany) return terms;
   return terms.map((term) => (term.tags.includes('cue:to') ? { ...term, tags: [] } : term));
 }
