@@ -375,6 +375,27 @@ effect-land-low = { $after } { $unit } free if nothing binds; below 10 free much
 effect-land-small = { $after } { $unit } free at most: the rise is less than a reading’s error.
 effect-rise = Free rises about { $range } { $unit }, as a third to a half usually binds; measure tomorrow.
 effect-must = Most of it binds while the must ferments: it does not protect the wine later.
+must-comes-back = About a third comes back as total SO2: + { $total } { $unit } (German trade text, 2012).
+must-yeast = Yeast { $least } to { $most } hours later (common practice, no source).
+must-malolactic = Up to { $most } { $unit } before crushing does malolactic no harm (AWRI).
+must-published =
+    { $read ->
+        [read] Published: { $list } ({ $source }).
+       *[memory] Published: { $list } ({ $source }; from memory, not read).
+    }
+must-range =
+    { $state ->
+        [sound] { must-colour }sound { $range }
+        [damaged] { must-colour }some damage { $range }
+       *[rot] { must-colour }with rot { $range }
+    } { $unit }
+must-colour =
+    { $style ->
+        [red] red{" "}
+       *[any] {""}
+    }
+must-say-state = How sound is the fruit? Say sound, some damage or rot, and there is a figure to choose.
+button-published = Add { $add }
 effect-raise = + { $dose } { $unit } if nothing binds; a third to a half usually binds; measure tomorrow.
 third-needs =
     { $third ->
@@ -486,6 +507,7 @@ fact-category = { $category ->
 fact-product = { $product ->
         [cider] cider
         [mead] mead
+        [alcohol-free] alcohol-free wine
        *[fruit-wine] fruit wine
     }
 fact-organic = organic
@@ -527,6 +549,8 @@ assumed-gallon = { $gallon ->
         [US] US gallons
        *[imperial] imperial gallons
     }
+assumed-must = { $fruit } kg × { $yield } L/100 kg = { $volume }
+assumed-must-usual = { $fruit } kg × { $yield } L/100 kg (your usual yield) = { $volume }
 assumed-barrels =
     { $count ->
         [one] a barrel of 225 L
@@ -588,7 +612,7 @@ ask-tablet_salt_g = { at }how many grams is one tablet? It stands on the packet;
 ask-tablet_SO2_g = { at }how many grams of SO2 does one effervescent tablet give? It stands on the packet.
 ask-mass_g = { at }how many grams?
 ask-mass-spoon = { at }how many grams? A level teaspoon of powder is roughly 5 to 6 g, and that is too rough to dose by: use a balance.
-ask-fruit = { at }what volume in litres or gallons? I do not reckon by weight of fruit.
+ask-fruit = { at }what volume of must, or what yield? With its unit, like: 65 L/100 kg, 160 gal/ton, 1300 L
 option = { $mark }) { $list }
 target-of =
     { $vessel ->

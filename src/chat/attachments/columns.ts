@@ -2,7 +2,16 @@ import type { EntryField } from './entry-fields.ts';
 
 /** Columns for the eye, which follow from others and are not read again. */
 export type ShownColumn =
-  'done' | 'noted' | 'late' | 'person' | 'wine-lot' | 'wine' | 'us-gallons' | 'calculated' | 'struck-reason';
+  | 'done'
+  | 'noted'
+  | 'late'
+  | 'person'
+  | 'wine-lot'
+  | 'wine'
+  | 'us-gallons'
+  | 'stock-left'
+  | 'calculated'
+  | 'struck-reason';
 
 /** Columns that are read again: the fields of entries, who noted them, and what took them back. */
 export type RecordColumn = EntryField | 'name' | 'struck_by';
@@ -39,6 +48,7 @@ export const COLUMNS: readonly Column[] = [
   { record: 'mass_g', letters: 11, decimals: 2 },
   { record: 'additive_volume_mL', letters: 11, decimals: 1 },
   { record: 'tablets', letters: 9 },
+  { shown: 'stock-left', letters: 12, decimals: 2 },
   { record: 'SO2_g', letters: 11, decimals: 2 },
   { record: 'added_mg_L', letters: 11, decimals: 1 },
   { record: 'planned_mg_L', letters: 11, decimals: 1 },

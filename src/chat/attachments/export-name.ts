@@ -9,16 +9,16 @@ export interface NamedExport extends ExportSpan {
 
 /**
  * The name of an export's file: what it holds, nothing of whose it is. `cellar-2026-11.csv` is a month,
- * `cellar-2026.csv` a year, `cellar-2026-11-03-to-2026-11-17-tank-4.xlsx` two weeks of one tank, `cellar.csv` all.
+ * `cellar-2026.csv` a year, `cellar-2026-11-03-to-2026-11-17-tank-4.xlsx` two weeks of one tank, `cellar.csv` all, `stock.csv` the chemical store.
  */
-export function exportName({ from, to, vessel, zone, format }: NamedExport): string {
+export function exportName({ from, to, vessel, of, zone, format }: NamedExport): string {
   const span = from === undefined && to === undefined ? [] : [spanText({ from, to, zone })];
   const plain = vessel
     ?.toLowerCase()
     .normalize('NFKD')
     .replaceAll(/[^a-z0-9]+/g, '-')
     .replaceAll(/^-+|-+$/g, '');
-  return `${['cellar', ...span, ...(plain ? [plain] : [])].join('-')}.${format}`;
+  return `${[of ?? 'cellar', ...span, ...(plain ? [plain] : [])].join('-')}.${format}`;
 }
 
 interface ZonedSpan {

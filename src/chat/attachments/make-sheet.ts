@@ -1,5 +1,6 @@
 import type { Person } from '../../core/cellar/cellar-store.ts';
 import type { LoggedEntry } from '../../core/cellar/entry.ts';
+import { stockMove } from '../../core/cellar/stock-move.ts';
 import { touches } from '../../core/cellar/touches.ts';
 import type { Cell, Sheet, SheetColumn } from './cell.ts';
 import { COLUMNS } from './columns.ts';
@@ -11,6 +12,7 @@ import { fieldsOfEntry } from './fields-of-entry.ts';
 import { joinNames } from './name-list.ts';
 import { SHOWN_CELLS } from './shown-cells.ts';
 import type { RecordRow } from './shown-cells.ts';
+import { stockThen } from './stock-then.ts';
 import { wineThen } from './wine-then.ts';
 
 /** What is taken away: times in milliseconds since 1970, `from` included and `to` not; one vessel, or all. */
@@ -18,6 +20,8 @@ export interface ExportSpan {
   readonly from?: number;
   readonly to?: number;
   readonly vessel?: string;
+  /** Only what did something to the chemical store. */
+  readonly of?: 'stock';
 }
 
 /** What a sheet is made of. */
@@ -38,14 +42,24 @@ export interface SheetSource {
  */
 export function makeSheet({ entries, wanted, people, zone, words }: SheetSource): Sheet {
   const known = wineThen(entries);
+  const left = stockThen(entries);
   const names = new Map(people.map(({ number, name }) => [number, name]));
   const rows = entries
     .filter((entry) => isWanted(entry, wanted))
+    .filter((entry) => wanted?.of !== 'stock' || left.has(entry.entry) || isStruckMove(entry))
     .toSorted((a, b) => a.entry - b.entry)
     .map((entry) => {
       const name = names.get(entry.by);
       const person = name ?? words.unnamed[entry.by] ?? String(entry.by);
-      return { entry, zone, person, wine: known.get(entry.entry) ?? {}, words: words.words, name };
+      return {
+        entry,
+        zone,
+        person,
+        wine: known.get(entry.entry) ?? {},
+        left: left.get(entry.entry),
+        words: words.words,
+        name,
+      };
     });
   return {
     columns: COLUMNS.map((column) => columnOf(column, words)),
@@ -58,6 +72,10 @@ function isWanted(entry: LoggedEntry, { from, to, vessel }: ExportSpan = {}): bo
   const isThen = entry.at >= (from ?? -Infinity) && entry.at < (to ?? Infinity);
   return isThen && (vessel === undefined || touches(entry).includes(vessel));
 }
+
+/** What was taken back stays in the sheet of the store too. */
+const isStruckMove = (entry: LoggedEntry): boolean =>
+  entry.struck !== undefined && stockMove(entry) !== undefined;
 
 function columnOf(column: Column, { words }: ExportWords): SheetColumn {
   const { letters, decimals } = column;

@@ -14,6 +14,8 @@ export interface RecordRow {
   /** How the person is called who noted it. */
   readonly person: string;
   readonly wine: WineThen;
+  /** What was left in store after it, in the unit of its amount. */
+  readonly left: number | undefined;
   readonly words: Readonly<Record<ExportWord, string>>;
 }
 
@@ -35,6 +37,7 @@ export const SHOWN_CELLS: Readonly<Record<ShownColumn, (row: RecordRow) => Cell>
     'volume_L' in entry && entry.volume_L !== undefined
       ? rounded(litresTo(entry.volume_L, 'galUS'))
       : undefined,
+  'stock-left': ({ left }) => left,
   calculated: ({ entry, words }) => {
     if (entry.kind === 'other') return words['is-not-calculated'];
     if (entry.kind !== 'addition' && entry.kind !== 'order') return undefined;

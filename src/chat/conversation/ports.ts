@@ -90,6 +90,7 @@ export type Errand =
       readonly from?: number;
       readonly to?: number;
       readonly vessel?: string;
+      readonly of?: 'stock';
       /** Names the stretch in the file's name. */
       readonly span: string;
       readonly format: 'csv' | 'xlsx';

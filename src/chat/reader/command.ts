@@ -65,7 +65,7 @@ export type Command =
   | { readonly name: 'set'; readonly setting: Setting }
   /** A setting whose value cannot be; `about` is what was written. */
   | { readonly name: 'set-wrong'; readonly of: Setting['of']; readonly about: string }
-  | { readonly name: 'export'; readonly span: Span; readonly format?: 'csv' | 'xlsx' }
+  | { readonly name: 'export'; readonly span: Span; readonly of?: 'stock'; readonly format?: 'csv' | 'xlsx' }
   | { readonly name: 'import'; readonly file: string }
   | { readonly name: 'backup' }
   | { readonly name: 'forget-me' }
@@ -101,4 +101,16 @@ export type Command =
   | { readonly name: 'make-person'; readonly who: string; readonly role: SaidRole }
   | { readonly name: 'at'; readonly cellar?: string } // at Blanca; without a name they are listed
   | { readonly name: 'name-cellar'; readonly as: string }
+  | { readonly name: 'range' } // how far the dose may be off; of a vessel, its last dose
+  /** Without targets the cellar's own; without a pH from 3.0 to 4.0. */
+  | {
+      readonly name: 'table';
+      readonly molecular_mg_L: readonly number[];
+      readonly ph_from?: number;
+      readonly ph_to?: number;
+    }
+  | { readonly name: 'molecular' } // molecular T4: by both bases
+  | { readonly name: 'forecast' } // forecast T4
+  | { readonly name: 'blend'; readonly vessel: string; readonly other?: string }
+  | { readonly name: 'too-much' } // too much SO2 in T4
   | { readonly name: 'read-along'; readonly on: boolean };

@@ -36,6 +36,8 @@ export interface SentenceValues {
   'assumed-additive': 'additive';
   'assumed-barrels': 'count' | 'volume';
   'assumed-gallon': 'gallon';
+  'assumed-must': 'fruit' | 'volume' | 'yield';
+  'assumed-must-usual': 'fruit' | 'volume' | 'yield';
   'assumed-separator': never;
   'assumed-target': 'kind' | 'value';
   'assumed-target-red': 'kind' | 'value';
@@ -73,6 +75,7 @@ export interface SentenceValues {
   'button-not-finished': never;
   'button-note': never;
   'button-order': never;
+  'button-published': 'add';
   'button-red': never;
   'button-remind': never;
   'button-round-all': never;
@@ -467,6 +470,13 @@ export interface SentenceValues {
   measured: 'additive' | 'amount' | 'count' | 'size' | 'strength' | 'unit';
   'more-head': 'vessel';
   'more-no-warnings': never;
+  'must-colour': 'style';
+  'must-comes-back': 'total' | 'unit';
+  'must-malolactic': 'most' | 'unit';
+  'must-published': 'list' | 'read' | 'source';
+  'must-range': 'range' | 'state' | 'style' | 'unit';
+  'must-say-state': never;
+  'must-yeast': 'least' | 'most';
   'no-dose-all-the-same': 'adds' | 'count' | 'stage' | 'unit' | 'wine';
   'no-dose-fermenting': 'vessel';
   'no-dose-malolactic': 'vessel';

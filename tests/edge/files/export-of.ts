@@ -14,17 +14,20 @@ export interface Wanted {
   readonly format?: 'csv' | 'xlsx';
   readonly decimalMark?: '.' | ',';
   readonly people?: readonly Person[];
+  readonly of?: 'stock';
 }
 
 /** The bytes of an export of some entries, made here and not in a thread of its own. */
 export function exportOf(
   entries: readonly LoggedEntry[],
-  { format = 'csv', decimalMark = '.', people = PEOPLE }: Wanted = {},
+  { format = 'csv', decimalMark = '.', people = PEOPLE, of }: Wanted = {},
 ): Promise<Uint8Array> {
   const words = sayExportWords(
     say,
     'en',
     entries.map(({ by }) => by),
   );
-  return writeGiven({ source: { entries, people, zone: 'Europe/Madrid', words }, format, decimalMark });
+  const wanted = of === undefined ? {} : { of };
+  const source = { entries, wanted, people, zone: 'Europe/Madrid', words };
+  return writeGiven({ source, format, decimalMark });
 }

@@ -41,7 +41,7 @@ function spanOf(talk: Talk, { days }: Days, year: Piece | undefined): Span | und
     return says(talk, 'year') ? undefined : { is: says(talk, 'last') ? 'last-month' : 'month' };
   if (says(talk, 'year')) return { is: says(talk, 'last') ? 'last-year' : 'year' };
   if (says(talk, 'last', 'this')) return undefined;
-  return { is: says(talk, 'all') || talk.isOfVessel ? 'all' : 'month' };
+  return { is: says(talk, 'all', 'stock') || talk.isOfVessel ? 'all' : 'month' };
 }
 
 /** `november`, `nov 2026`. */
@@ -50,7 +50,7 @@ function monthOf(talk: Talk, { month }: Piece, year: Piece | undefined): Span | 
   return { is: 'named-month', month, ...(year && { year: Number(year.text) }) };
 }
 
-/** Reads `export`, `export last month as csv`, `export 1 Oct to 31 Oct`, `export T4 2026`. */
+/** Reads `export`, `export last month as csv`, `export 1 Oct to 31 Oct`, `export T4 2026`, `export stock`. */
 export function readExport(talk: Talk): Command | undefined {
   const { said, board } = talk;
   const first = said.findIndex(({ ids }) => !ids.includes('filler'));
@@ -62,9 +62,10 @@ export function readExport(talk: Talk): Command | undefined {
   const read = new Set([...days.pieces, ...(year ? [year] : []), ...(month ? [month] : [])]);
   const dashes = said.filter(({ kind, text }) => kind === 'mark' && text === '-');
   if (days.days.length === 2) for (const dash of dashes) read.add(dash);
-  const allowed = ['export', 'this', 'last', 'month', 'year', 'all', 'csv', 'xlsx', 'for', 'from', 'to', 'until', 'of', 'on'] as const; // prettier-ignore
+  const allowed = ['export', 'this', 'last', 'month', 'year', 'all', 'csv', 'xlsx', 'stock', 'for', 'from', 'to', 'until', 'of', 'on'] as const; // prettier-ignore
   if (!saysOnly(talk, allowed, read)) return undefined;
   const span = month ? monthOf(talk, month, year) : spanOf(talk, days, year);
   const format = says(talk, 'xlsx') ? 'xlsx' : says(talk, 'csv') ? 'csv' : undefined;
-  return span && { name: 'export', span, ...(format && { format }) };
+  const of = says(talk, 'stock') && !talk.isOfVessel ? 'stock' : undefined;
+  return span && { name: 'export', span, ...(of && { of }), ...(format && { format }) };
 }

@@ -29,6 +29,7 @@ export function takeAway(
     kind: 'export',
     ...stretch,
     ...(vessel !== undefined && { vessel }),
+    ...(command.of && { of: command.of }),
     format: command.format ?? 'xlsx',
     zone: zoneOf(settings),
     language,
