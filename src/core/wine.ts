@@ -4,8 +4,8 @@ export type Style = 'red' | 'white' | 'rosé';
 /** What kind of wine, where the kind changes target or law. A still dry table wine has none. */
 export type Category = 'sweet' | 'sparkling' | 'fortified';
 
-/** What is fermented, when it is not grapes. */
-export type Product = 'cider' | 'mead' | 'fruit-wine';
+/** What is fermented, when it is not grapes; and wine without its alcohol, which the law has apart. */
+export type Product = 'cider' | 'mead' | 'fruit-wine' | 'alcohol-free';
 
 /** Where the wine stands on its way. The usual targets are for `finished` wine only. */
 export type Stage = 'must' | 'fermenting' | 'malolactic' | 'base' | 'finished' | 'bottled';

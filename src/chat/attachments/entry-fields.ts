@@ -106,7 +106,7 @@ export const FIELD_FORMS: Readonly<Record<EntryField, FieldForm>> = {
   },
   product: {
     is: 'choice',
-    of: { cider: true, mead: true, 'fruit-wine': true } satisfies Record<Product, true>,
+    of: { cider: true, mead: true, 'fruit-wine': true, 'alcohol-free': true } satisfies Record<Product, true>,
   },
   organic: { is: 'yes-no' },
   stage: {

@@ -9,7 +9,7 @@ export interface LimitFacts {
   /** Of the basis that the region's law names. */
   readonly sugar_g_L?: number;
   readonly category?: Category;
-  readonly product?: Product | 'alcohol-free';
+  readonly product?: Product;
   readonly stage?: Stage;
   readonly alcohol_percent?: number;
   /** `made-with`: only in the US, a wine "made with organic grapes". */

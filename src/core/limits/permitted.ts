@@ -63,7 +63,8 @@ export function notPermittedBy(
       confidence: region === 'oiv' ? 'read' : 'unconfirmed',
     };
   // The rules on sodium speak of wine alone.
-  if (contains !== 'sodium' || product !== undefined) return undefined;
+  const isWine = product === undefined || product === 'alcohol-free';
+  if (contains !== 'sodium' || !isWine) return undefined;
   const rule = SODIUM_RULES[region] ?? { rule: 'no-list-read', confidence: 'unconfirmed' };
   return { ...rule, reason: 'sodium', region };
 }

@@ -5,7 +5,7 @@ import { isStranger } from '../stranger.ts';
 
 const STYLES: readonly Style[] = ['red', 'white', 'rosé'];
 const CATEGORIES: readonly Category[] = ['sweet', 'sparkling', 'fortified'];
-const PRODUCTS: readonly Product[] = ['cider', 'mead', 'fruit-wine'];
+const PRODUCTS: readonly Product[] = ['cider', 'mead', 'fruit-wine', 'alcohol-free'];
 
 /** `rose to 3.6` is a verb, `sample port` a tap. */
 function isOtherwise(board: Board, i: number): boolean {
