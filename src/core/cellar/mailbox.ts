@@ -36,8 +36,14 @@ export interface Post {
  * fails, and then nothing of that call is kept.
  */
 export interface Mailbox {
-  /** Keeps what arrived, all of it or none; resolves when it is durable, with what was not known. */
-  receive(arrived: readonly Arrived[]): Promise<readonly Arrived[]>;
+  /**
+   * Keeps what arrived, all of it or none; resolves when it is durable, with what was not known. `onWritten` is told of that
+   * earlier: a turn that handles it then is durable no sooner than it, and fails where it is not kept.
+   */
+  receive(
+    arrived: readonly Arrived[],
+    onWritten?: (fresh: readonly Arrived[]) => void,
+  ): Promise<readonly Arrived[]>;
   /** What is not handled yet, the lowest number first. */
   waiting(channel: string): Promise<readonly Waiting[]>;
   /** Counts a try of each; resolves when that is durable. */

@@ -69,6 +69,7 @@ export function makeHandling(options: AnswerOptions): Handling {
 
   const answer = async (arrival: Arrival): Promise<void> => {
     if (arrival.tapId !== undefined) void tellTapSeen(arrival.tapId);
+    if (arrival.isJoin && (await arrival.isKept) === false) return;
     if (arrival.isJoin) return end([arrival], [say(joinReply(arrival.message.language))]);
     const begun = performance.now();
     let failure: unknown;
@@ -93,6 +94,8 @@ export function makeHandling(options: AnswerOptions): Handling {
         return meter.handled('answered', (performance.now() - begun) / 1000);
       } catch (error) {
         failure = error;
+        // What could not be kept the platform brings again.
+        if ((await arrival.isKept) === false) return;
       }
     }
     await putAside(arrival, failure);

@@ -26,6 +26,8 @@ export interface Arrival extends Spot {
   readonly tapId?: string;
   /** A sheet that can be read. */
   readonly file?: ArrivedFile;
+  /** Whether it was kept in the end: it is handled before that is known. Absent: it was. */
+  readonly isKept?: Promise<boolean>;
   /** We were brought into the group. */
   readonly isJoin?: true;
 }

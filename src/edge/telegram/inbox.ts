@@ -57,10 +57,16 @@ export function createInbox(options: InboxOptions): Inbox {
     if (signal.aborted) return 0;
     const [first] = queue;
     const fresh = queue.findIndex((arrival) => !isStale(arrival));
-    const stale = fresh === -1 ? queue : queue.slice(0, fresh);
-    if (isStale(first)) await handling.leave(stale as [Arrival, ...Arrival[]]);
-    else await handling.answer(first);
-    return isStale(first) ? stale.length : 1;
+    const stale = fresh === -1 ? [...queue] : queue.slice(0, fresh);
+    if (stale.length === 0) {
+      await handling.answer(first);
+      return 1;
+    }
+    const areKept = await Promise.all(stale.map(({ isKept = true }) => isKept));
+    // What could not be kept the platform brings again.
+    const [oldest, ...others] = stale.filter((_, at) => areKept[at]);
+    if (oldest !== undefined) await handling.leave([oldest, ...others]);
+    return stale.length;
   });
 
   /** What may have ended the process before is handled alone, so that it harms nothing else. */
@@ -85,11 +91,20 @@ export function createInbox(options: InboxOptions): Inbox {
         known.set(update.update_id, arrival);
         return [{ channel: CHANNEL, number: update.update_id, body: JSON.stringify(update), received_at }];
       });
-      const fresh = await store.receive(arrived);
-      meter.received(fresh.length);
-      for (const { number } of fresh) {
-        const arrival = known.get(number);
-        if (arrival !== undefined) queues.add(arrival.chatId, arrival);
+      const { promise: isKept, resolve: tell } = Promise.withResolvers<boolean>();
+      try {
+        // Handled while it is written: what it writes then goes to the disk together with it.
+        const fresh = await store.receive(arrived, (written) => {
+          for (const { number } of written) {
+            const arrival = known.get(number);
+            if (arrival !== undefined) queues.add(arrival.chatId, { ...arrival, isKept });
+          }
+        });
+        tell(true);
+        meter.received(fresh.length);
+      } catch (error) {
+        tell(false);
+        throw error;
       }
     },
     recover: async () => {

@@ -42,6 +42,21 @@ export function testMailbox(create: CreateStore): void {
     await store.close();
   });
 
+  test('lets a turn handle what arrived as soon as it is written, and both are kept', async () => {
+    const store = await create(() => 0);
+    const turns: Promise<unknown>[] = [];
+    const fresh = await store.receive([arrived(1), arrived(2)], (written) => {
+      for (const { number } of written) turns.push(write(store, handled(number), writeOf(note(number))));
+    });
+    await Promise.all(turns);
+    expect([numbersOf(fresh), await waiting(store)]).toEqual([[1, 2], []]);
+    expect(await allEntries(store)).toHaveLength(2);
+    const told: number[] = [];
+    await store.receive([arrived(2), arrived(3)], (written) => void told.push(...numbersOf(written)));
+    expect(told).toEqual([3]);
+    await store.close();
+  });
+
   test('takes a batch of any length', async () => {
     const store = await create(() => 0);
     const many = Array.from({ length: 1500 }, (_, at) => arrived(at));

@@ -98,9 +98,9 @@ test('an update that cannot be kept is not taken, so that the platform brings it
     door,
     store: {
       ...store,
-      receive: async (arrived) => {
+      receive: async (arrived, onWritten) => {
         if (full) throw new StoreError('full', { cause: new Error('planted') });
-        return store.receive(arrived);
+        return store.receive(arrived, onWritten);
       },
     },
   });

@@ -26,13 +26,16 @@ export function createMemoryMailbox({ arrived: all, posts }: MemoryMail): Mailbo
   const arrivedOf = (channel: string): ArrivedKept[] =>
     [...all.values()].filter((one) => one.channel === channel);
   return {
-    receive: async (arrived) =>
-      arrived.filter((one) => {
+    receive: async (arrived, onWritten) => {
+      const fresh = arrived.filter((one) => {
         const key = keyOf(one.channel, one.number);
         if (all.has(key)) return false;
         all.set(key, { ...one, tries: 0 });
         return true;
-      }),
+      });
+      onWritten?.(fresh);
+      return fresh;
+    },
     waiting: async (channel) =>
       arrivedOf(channel)
         .filter(({ handled_at }) => handled_at === undefined)

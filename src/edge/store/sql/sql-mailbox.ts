@@ -4,15 +4,20 @@ import { countTries, keepArrived, pruneArrived, readWaiting } from './arrived-th
 import { dropPosts, movePosts, readPosts } from './posts.ts';
 import type { Tables } from './tables.ts';
 
-/** The mailbox in the tables. `write` runs its work whole or not at all, and resolves when it is durable. */
+/**
+ * The mailbox in the tables. `write` runs its work whole or not at all, and resolves when it is durable; `onWritten` is
+ * called in between.
+ */
 export function createSqlMailbox(
   db: Kysely<Tables>,
-  write: (work: () => Promise<void>) => Promise<void>,
+  write: (work: () => Promise<void>, onWritten?: () => void) => Promise<void>,
 ): Mailbox {
   return {
-    receive: async (arrived) => {
+    receive: async (arrived, onWritten) => {
+      if (arrived.length === 0) return [];
       let fresh: readonly Arrived[] = [];
-      if (arrived.length > 0) await write(async () => void (fresh = await keepArrived(db, arrived)));
+      const keep = async (): Promise<void> => void (fresh = await keepArrived(db, arrived));
+      await write(keep, () => onWritten?.(fresh));
       return fresh;
     },
     waiting: (channel) => readWaiting(db, channel),

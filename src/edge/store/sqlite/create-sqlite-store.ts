@@ -41,8 +41,9 @@ export function createSqliteStore({ path, writer, reader, now, close }: SqlitePa
     return commits.write(work);
   };
 
-  const writeDurably = async (work: () => Promise<void>): Promise<void> => {
+  const writeDurably = async (work: () => Promise<void>, onWritten?: () => void): Promise<void> => {
     const batch = await write(work);
+    onWritten?.();
     await batch.durable;
   };
 
