@@ -6,6 +6,7 @@ import { CHANNEL } from './channel.ts';
 import { mergePosts, type Parcel } from './merge-posts.ts';
 import { createGate, createWindow, type Limits, type Window } from './pace.ts';
 import type { Sent } from './send-post.ts';
+import { makeSettleTogether } from './settle-together.ts';
 import { createSlowDowns } from './slow-downs.ts';
 
 /** What sending needs. */
@@ -129,10 +130,12 @@ export function createOutbox(options: OutboxOptions): Outbox {
   /** Durable before the next one of the chat leaves, so that after a crash one at most is sent again. */
   const settle = async (lane: Lane, posts: readonly Post[]): Promise<void> => {
     const ids = posts.map(({ id }) => id);
-    await persist(() => store.settle(CHANNEL, ids));
+    await settleTogether(ids, lane.posts.length > posts.length);
     lane.posts.splice(0, posts.length);
     count -= posts.length;
   };
+
+  const settleTogether = makeSettleTogether((ids) => persist(() => store.settle(CHANNEL, ids)), clock);
 
   const move = async (lane: Lane, chat: string): Promise<void> => {
     const { chat: from, posts } = lane;
