@@ -20,6 +20,7 @@ const TEN_mg_kg_L = { value: 10, unit: 'mg/kg or mg/L' } as const;
 const TEN_mg_kg = { value: 10, unit: 'mg/kg' } as const;
 const TEN_ppm = { value: 10, unit: 'ppm' } as const;
 
+// prettier-ignore
 /**
  * The thresholds of the sulfite statement on file. At exactly 10 the US and Canada want it and the EU does not; Canada,
  * Australia and New Zealand count only what was added.
@@ -31,7 +32,6 @@ const TEN_ppm = { value: 10, unit: 'ppm' } as const;
  * LABEL_ROWS.find(({ id }) => id === 'label-us')?.comparator // => '>='
  * ```
  */
-// prettier-ignore
 export const LABEL_ROWS: readonly LabelRow[] = [
   { id: 'label-eu', regions: ['eu'], threshold: TEN_mg_kg_L, comparator: '>', counts: 'total', text: 'Regulation (EU) 1169/2011, Annex II point 12', checked: 'agency' },
   { id: 'label-uk', regions: ['uk'], threshold: TEN_mg_kg_L, comparator: '>', counts: 'total', text: 'assimilated Regulation (EU) 1169/2011 (UK)', checked: 'agency' },

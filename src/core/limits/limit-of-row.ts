@@ -28,7 +28,7 @@ const PER_UNIT: Readonly<Record<LimitUnit, number>> = {
  *
  * @example
  * ```ts
- * const row = { id: 'example', region: 'codex', products: ['still'], of: 'total', operator: '<=', value: 350, unit: 'mg/kg', text: 'codex', checked: 'law-text', status: 'in-force' } as const
+ * const row = { id: 'example', region: 'codex', products: ['still'], of: 'total', operator: '<=', value: 350, unit: 'mg/kg', text: 'codex', checked: 'law-text', status: 'in-force' }
  * limitOfRow(row, {}).limit_mg_L // => 346.5
  * limitOfRow(row, { density_kg_L: 1.02 }).limit_mg_L // => 357
  * ```

@@ -8,6 +8,7 @@ const FRUIT: readonly LimitProduct[] = [...GRAPE, 'cider', 'fruit-wine'];
 const ALL: readonly LimitProduct[] = [...GRAPE, 'cider', 'mead', 'fruit-wine'];
 const PALE: readonly Style[] = ['white', 'rosé'];
 
+// prettier-ignore
 /**
  * Every limit of SO2 that is on file, by market, with the text it is in and how that was checked; figures as the law
  * has them, in its own unit, sugar in g/L. A row that was repealed, that another source has in another unit, that is a
@@ -20,7 +21,6 @@ const PALE: readonly Style[] = ['white', 'rosé'];
  * LIMIT_ROWS.find(({ id }) => id === 'eu-red-dry')?.value // => 150
  * ```
  */
-// prettier-ignore
 export const LIMIT_ROWS: readonly LimitRow[] = [
   { id: 'oiv-red-dry', region: 'oiv', products: ['still'], styles: ['red'], sugar: { to_g_L: 4, toIncluded: true, basis: 'reducing-substances' }, of: 'total', operator: '<=', value: 150, unit: 'mg/L', text: 'oiv', version: '2019 issue', checked: 'law-text', status: 'in-force', note: 'recommends-only' },
   { id: 'oiv-wr-dry', region: 'oiv', products: ['still'], styles: PALE, sugar: { to_g_L: 4, toIncluded: true, basis: 'reducing-substances' }, of: 'total', operator: '<=', value: 200, unit: 'mg/L', text: 'oiv', version: '2019 issue', checked: 'law-text', status: 'in-force', note: 'recommends-only' },
