@@ -43,7 +43,7 @@ function clockBehind(board: Board, k: number): Hour | undefined {
 /** The words that a moment can begin with. */
 const MOMENTS: ReadonlySet<OwnWordId> = new Set([
   'today', 'this-morning', 'yesterday', 'last-night', 'before-yesterday', 'last', 'noon', 'count-half', 'count-1', 'count-2',
-  'count-3', 'count-4', 'count-5', 'count-6',
+  'count-3', 'count-4', 'count-5', 'count-6', 'ago-before',
 ]); // prettier-ignore
 
 /** Whether a moment could begin at a piece at all: most figures have nothing of one beside them. */
@@ -69,7 +69,7 @@ function isOfVessel({ pieces, terms }: Board, k: number): boolean {
 function partAt(board: Board, k: number): Part | undefined {
   const { pieces } = board;
   if (!mayOpen(pieces, k) || isOfVessel(board, k)) return undefined;
-  const ago = pieces.some(({ ids }) => ids.includes('ago')) ? agoAt(pieces, k) : undefined;
+  const ago = pieces.some(({ ids }) => ids.includes('ago') || ids.includes('ago-before')) ? agoAt(pieces, k) : undefined;
   if (ago) return { ...ago, from: k, isPast: true, isClaimed: true };
   const found = dayAt(pieces, k);
   if (found) {

@@ -29,8 +29,11 @@ function yearAt(pieces: readonly Piece[], i: number): { year?: number; to: numbe
   return year === undefined ? { to: i - 1 } : { year, to: at };
 }
 
-const pastOrdinal = (pieces: readonly Piece[], i: number): number =>
-  isOwn(pieces, i, 'ordinal') && pieces[i]?.gap === false ? i + 1 : i;
+/** `12th`, and `12.` before the name of a month. */
+const pastOrdinal = (pieces: readonly Piece[], i: number): number => {
+  const isPoint = isMark(pieces, i, '.') && pieces[i + 1]?.month !== undefined;
+  return (isOwn(pieces, i, 'ordinal') || isPoint) && pieces[i]?.gap === false ? i + 1 : i;
+};
 
 /** `12 Nov`, `12th of November 2026`, `Nov 12`. */
 function namedDate(pieces: readonly Piece[], i: number): DayAt | undefined {
@@ -82,7 +85,7 @@ export function dayAt(pieces: readonly Piece[], i: number): DayAt | undefined {
   const piece = pieces[i];
   if (piece?.kind === 'number') return figuredDate(pieces, i) ?? namedDate(pieces, i);
   if (piece?.kind !== 'word') return undefined;
-  const past = (to: number): number => (isOwn(pieces, to + 1, 'part-of-day') ? to + 1 : to);
+  const past = (to: number): number => (isOwn(pieces, to + 1, 'part-of-day', 'last') ? to + 1 : to);
   if (isOwn(pieces, i, 'today', 'this-morning')) return { day: { is: 'today' }, to: i };
   if (isOwn(pieces, i, 'before-yesterday')) return { day: { is: 'before-yesterday' }, to: past(i) };
   if (isOwn(pieces, i, 'yesterday', 'last-night')) return { day: { is: 'yesterday' }, to: past(i) };

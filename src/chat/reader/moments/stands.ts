@@ -1,5 +1,5 @@
 import type { Board } from '../board.ts';
-import { termAt } from '../board.ts';
+import { isCue, termAt } from '../board.ts';
 import type { Piece } from '../own-pieces.ts';
 import { isOwn } from '../own-pieces.ts';
 import type { OwnWordId } from '../words/words.ts';
@@ -18,7 +18,10 @@ const SMALL: ReadonlySet<OwnWordId> = new Set(['to', 'of', 'with', 'lot', 'numbe
 const isOurs = ({ ids }: Piece): boolean => ids.some((id) => OURS.has(id));
 
 const isBusy = (board: Board, piece: Piece): boolean =>
-  piece.kind === 'word' && !isOurs(piece) && termAt(board, piece.from).tags.some((tag) => BUSY.test(tag));
+  piece.kind === 'word' &&
+  !isOurs(piece) &&
+  termAt(board, piece.from).tags.some((tag) => BUSY.test(tag)) &&
+  !(board.pastTense && isCue(board, piece.from, 'past-if-accented'));
 
 const isCode = ({ pieces }: Board, k: number): boolean =>
   pieces[k + 1]?.kind === 'number' && pieces[k + 1]?.gap === false;
@@ -66,7 +69,9 @@ const isSampled = ({ pieces }: Board, k: number): boolean =>
 function standsInFact(board: Board, part: Part, around: readonly number[]): boolean {
   if (board.tells) return true;
   const isVerbs = around.some((k) =>
-    termAt(board, board.pieces[k]?.from ?? -1).tags.some((tag) => tag === 'cue:past' || tag === 'cue:put'),
+    termAt(board, board.pieces[k]?.from ?? -1).tags.some(
+      (tag) => tag === 'cue:past' || tag === 'cue:past-if-accented' || tag === 'cue:put',
+    ),
   );
   // `added 250 g T4, pump over at 17:00`: beside other words than those of the addition the time is theirs.
   if (!isVerbs && around.some((k) => isOfOther(board, k))) return false;

@@ -98,6 +98,10 @@ const holdsUnknownVerb = (board: Board): boolean =>
       isStranger(board, i) && termAt(board, i).text.length > 3 && /^\p{Ll}/u.test(placeOf(board, i, i).text),
   );
 
+/** `1 livre de méta`: the word behind a figure, in a language whose every unit nobody has listed. */
+const isOfUnknown = (board: Board, i: number | undefined): boolean =>
+  i !== undefined && board.lexicon.language !== 'en' && isStranger(board, i + 1);
+
 const isNegated = ({ notes }: Board): boolean => notes.some(({ id }) => id === 'negated');
 
 function findFree(board: Board, candidates: readonly number[]): void {
@@ -123,7 +127,8 @@ function findFree(board: Board, candidates: readonly number[]): void {
   const figure = only === undefined ? undefined : figureAt(board, only);
   const unit = only === undefined ? undefined : concentrationAt(board, only + 1);
   const fine =
-    !speaksOfAdding(board) && !((unit !== undefined || !board.lexicon.isTold) && holdsUnknownVerb(board)) &&
+    !speaksOfAdding(board) &&
+    !isOfUnknown(board, only) && !((unit !== undefined || !board.lexicon.isTold) && holdsUnknownVerb(board)) &&
     only !== undefined && figure !== undefined && !isTaken && rangeEnd(board, only) === undefined && !isAfterInto(board, only) && !isAfterArticle(board, only) && !mayGoIn(board, only) &&
     vintage === undefined && !isMark(board, only + 1, '/') && !isMark(board, only - 1, '/') && figure.value <= MOST_UNLABELLED_FREE_mg_L && (isWhole(board, only) || unit !== undefined) && unit?.id !== 'g/L'; // prettier-ignore
   if (fine && figure.value < 0) return refuse(board, 'negative-value', figure.from, only);
