@@ -9,7 +9,7 @@ import { choiceLines } from '../lines/choice.ts';
 import { conditionLines, redFigures } from '../lines/condition.ts';
 import { expectationLines } from '../lines/expectation.ts';
 import { factLines } from '../lines/facts.ts';
-import { isCapped } from '../lines/capped.ts';
+import { isCapped, lawAssumedLines } from '../lines/capped.ts';
 import { firstOfDose, hasAmount } from '../lines/first-dose.ts';
 import { basisLines } from '../lines/basis.ts';
 import { bottledLines } from '../lines/bottled.ts';
@@ -75,33 +75,44 @@ function wholeDose(reading: Reading, request: DoseRequest, answer: DoseAnswer, t
       ...underLines(answer.warnings, manner),
       ...warningLines(answer.warnings, manner, 'first', ['free-low-may-bind-all']),
     ],
-    lines: [
-      ...bottledLines(reading),
-      ...first.slice(0, 1),
-      ...underLines(answer.warnings, manner),
-      ...first.slice(1),
-      ...shortLines(toBeWeighed(reading, answer), turn.here),
-      ...condition,
-      ...expectationLines(reading, answer, otherArithmetic(request), manner),
-      ...factLines(reading, manner),
-      ...assumedLines(reading, manner),
-      ...basisLines(reading, answer, manner),
-      ...workingLines(answer.steps, manner),
-      ...warningLines(answer.warnings, manner, 'warning', lowIsSaid(reading)),
-      ...cautionLines(additive, inFull),
-    ],
-    buttons: doseButtons(ref, {
-      mayBeNoted:
-        turn.here.role !== 'guest' &&
-        vesselsIn(reading.fields).length > 0 &&
-        toBeWeighed(reading, answer) !== undefined,
-      stageAssumed: reading.assumed.stage !== undefined,
-      mayBeRed: redFigures(answer) !== undefined,
-      colourUnknown: isColourUnknown(reading),
-      cautionsShort: !inFull,
-    }),
+    // A line of a round says no more than its own line; its cautions stand under the round.
+    lines: turn.round
+      ? [...first, ...cautionLines(additive, inFull)]
+      : [
+          ...bottledLines(reading),
+          ...first.slice(0, 1),
+          ...underLines(answer.warnings, manner),
+          ...first.slice(1),
+          ...shortLines(toBeWeighed(reading, answer), turn.here),
+          ...condition,
+          ...expectationLines(reading, answer, otherArithmetic(request), manner),
+          ...factLines(reading, manner),
+          ...assumedLines(reading, manner),
+          ...(isNearLimit(answer) ? lawAssumedLines(reading, turn.settings) : []),
+          ...basisLines(reading, answer, manner),
+          ...workingLines(answer.steps, manner),
+          ...warningLines(answer.warnings, manner, 'warning', lowIsSaid(reading)),
+          ...cautionLines(additive, inFull),
+        ],
+    buttons: turn.round
+      ? []
+      : doseButtons(ref, {
+          mayBeNoted:
+            turn.here.role !== 'guest' &&
+            vesselsIn(reading.fields).length > 0 &&
+            toBeWeighed(reading, answer) !== undefined,
+          stageAssumed: reading.assumed.stage !== undefined,
+          mayBeRed: redFigures(answer) !== undefined,
+          colourUnknown: isColourUnknown(reading),
+          cautionsShort: !inFull,
+        }),
     ...(inFull && { cautioned: additive.id }),
   };
+}
+
+/** Whether the wine comes near a limit, or passes it, so that what was taken for it is worth a word. */
+function isNearLimit({ warnings }: DoseAnswer): boolean {
+  return warnings.some(({ code }) => code === 'total-near-limit' || code === 'total-over-limit');
 }
 
 /** Whether a vessel is named whose colour nobody has told. */
