@@ -220,8 +220,8 @@ law-unknown =
     }
 dose-capped-kept =
     { $reserve ->
-        [none] { $kept } { $unit } are kept below it, as a measured total may be so far off. What you aim at would pass it.
-       *[some] { $kept } { $unit } are kept below it: { $error } as a measured total may be so far off, { $reserve } for bottling. What you aim at would pass it.
+        [none] { $kept } { $unit } are kept below it, as a measured { $of } may be so far off. What you aim at would pass it.
+       *[some] { $kept } { $unit } are kept below it: { $error } as a measured { $of } may be so far off, { $reserve } for bottling. What you aim at would pass it.
     }
 full-dose-asks =
     { $of ->
@@ -232,6 +232,7 @@ full-dose-asks =
         }{ $after }, over the limit of { $limit } { $unit } ({ rule-short }). Give the figures all the same?
     }
 full-dose-care = The wine may not be sold so under that law. The log keeps that it was known. Not legal advice: confirm for your market.
+full-dose-left = Left: the smaller dose stands.
 full-dose-none = There is no dose above that would pass a limit.
 button-full-dose = Full dose
 button-all-the-same = Yes, all the same
@@ -808,6 +809,13 @@ help-wine-6 = T4 40 hl pH 3.5 free 18 +30% → more, for what binds; or: a third
 help-wine-7 = T4 40 hl pH 3.5 free 18, 10% kmbs → from a solution; also smbs, 6% so2, 5 g tabs
 help-wine-8 = 100 g kmbs in 20 hl → what an amount adds
 help-wine-9 = Red, rosé, sweet, cider, mead, organic; must, fermenting, ML done: say what it is, or the reply says what it took.
+help-must-1 = For must and juice there is no usual figure: I name what was published, you choose.
+help-must-2 = must 20 hl sound → figures to choose from; also: some damage, rot
+help-must-3 = must 20 hl add 40 → what to weigh for 40 mg/L
+help-must-4 = 2 t grapes 65 L/100 kg sound → by weight of fruit and its yield
+help-must-5 = 5 tons grapes 160 gal/ton add 50 → the same in tons and gallons
+help-must-6 = yield 65 → sets the usual yield, litres from 100 kg
+help-must-7 = Most of it binds: it is no protection later, and about a third is there again as total SO2.
 help-solutions-1 = Solutions in water: none of them is a dose for wine, and nothing of them goes into the log.
 help-solutions-2 = make 5 L of 10% kmbs → a stock: what to weigh, how strong it is, mL for a barrel
 help-solutions-3 = make 1 L of 10% kmbs, add 30 ppm → the mL that take a 225 L barrel so far
@@ -815,6 +823,15 @@ help-solutions-4 = 10 g kmbs in 100 mL water → how strong that is
 help-solutions-5 = holding solution 225 L → for an empty barrel; also: holding solution for 3 barrels
 help-solutions-6 = rinse 20 L → for clean equipment; of your own strength: rinse 20 L 1% kmbs
 help-solutions-7 = Burning discs or wicks: never a dose for wine, and no figures from me.
+help-law-1 = Every dose is held against the limits of your market. Not legal advice: confirm for yours.
+help-law-2 = law EU → also US, UK, OIV, Canada, Japan …; for the whole cellar
+help-law-3 = limit T4 → the rule, its text, how it was checked, the room left
+help-law-4 = limit red RS 3 EU → without a vessel
+help-law-5 = T4 red → colour and sugar (RS 3 with a reading) decide; unknown counts at its strictest
+help-law-6 = T4 organic → also quality sparkling, PDO, bulk wine, density 0.992
+help-law-7 = T4 designated 300 → a sweet wine of a designation; also T4 declared year
+help-law-8 = T4 keep 30 for bottling → kept below the limit, with 15 for the reading’s error
+help-law-9 = Over it the smaller dose comes first: full dose, then yes. The log keeps that.
 help-stock-1 = Every addition draws on it, once something is in.
 help-stock-2 = received 25 kg kmbs lot 4471 from Norte Supplies → also 10 L of 6% so2
 help-stock-3 = stock → what is there, by lot; stock kmbs: one
@@ -1516,6 +1533,9 @@ open-head =
        *[many] { $count } open orders:
     }
 open-line = { $entry } · { $vessel } { $list } · { $who }, { $when }
+language-changed = You wrote in English: I answer in English from now on.
+language-set = I answer in English.
+button-stay-language = Stay in English
 settings-head = Settings of this cellar, and how to change them:
 setting-set = Set. { $list }
 setting-units =
@@ -1534,6 +1554,11 @@ setting-allowance =
     { $percent ->
         [none] No allowance for binding (allowance 30%)
        *[other] Allowance for binding: { $percent } % on doses from a target (no allowance)
+    }
+setting-yield =
+    { $yield ->
+        [none] No usual yield of fruit (yield 65)
+       *[other] Yield: { $yield } L of must from 100 kg of fruit (no yield)
     }
 setting-basis =
     Basis: { $basis ->
@@ -1554,6 +1579,7 @@ setting-daily =
 setting-quiet = Quiet: { $from } to { $to } (quiet 20 to 6)
 setting-ph-days = A pH counts { $days } days (pH counts 14 days)
 setting-check-days = Checks every { $usual } days; barrels and low ones every { $often } (check every 30 days, check barrels every 14 days)
+setting-language = Language: English (language es)
 setting-short-replies =
     Replies: { $short ->
         [short] short (long replies)
@@ -1564,6 +1590,7 @@ setting-wrong =
         [units] Like: we work in gallons
         [usual-additive] Like: our usual is kmbs 57%
         [target] Like: target 0.6 for reds
+        [yield] Like: yield 65
         [quiet] Like: quiet 20 to 6
         [daily] Like: daily list at 7:30
         [zone] Like: time zone Europe/Madrid
@@ -1988,7 +2015,13 @@ stock-lacks =
         [strength] Which strength has the { additive }? Write it: received 10 L of 6% so2
         [size] Tablets of how many grams? Write it: received 50 tablets 5 g
         [volume] Additions of { additive } are measured by volume. Write it in litres: received 10 L of 6% so2
-       *[amount] How much { additive }? Write it: received 25 kg kmbs
+        [one] One additive a message: received 25 kg kmbs
+       *[amount] How much { additive }? Write it with its unit: { $event ->
+            [counted] stock kmbs 3.2 kg
+            [used] used 200 g kmbs for rinsing
+            [discarded] discarded 1 kg kmbs
+           *[received] received 25 kg kmbs
+        }
     }
 
 # The laboratory: what a titration comes to
@@ -2041,3 +2074,165 @@ titration-asks = { $missing ->
 }
 titration-either = { $strength } N gives { $normal } { $unit }, { $strength } M gives { $molar } { $unit }.
 button-keep-result = Keep it
+
+# The laboratory: how far a dose may be off, tables, both bases
+
+range-dose = { $vessel ->
+    [none] As
+   *[other] { $vessel }: as
+} a range (95 %): { $amount ->
+    [none] { $low }–{ $high } { $unit } SO2
+   *[other] { $amount }, that is { $low }–{ $high } { $unit } SO2
+}.
+range-sure = After the dose you can be sure of { $molecular } { $unit } molecular, if what binds is as reckoned.
+range-rests = Rests on pH ± { $ph } and free ± { $free } { $unit }{ $said ->
+    [both] .
+    [one] {" "}(what you did not say: common practice, no source).
+   *[none] {" "}(common practice, no source). Yours: pH 3.58±0.03 free 21±2
+}
+range-nothing = A range needs a dose first. Send a reading, like: T4 1450 gal pH 3.58±0.03 free 21
+table-head = Free SO2 ({ $unit }) for molecular { $targets }, { $basis ->
+    [oiv] by OIV at 12 % vol and 20 °C (pK { $pK })
+   *[other] pK { $pK }
+}:
+table-row = pH { $ph }: { $free }
+table-care = Targets are published on pK 1.81. Above 60 free, think of the total and the taste.
+molecular-head = { $vessel }: pH { $ph }{ $free ->
+    [none] , no free SO2 on file.
+   *[other] , free { $free } { $unit } ({ $day }).
+}
+molecular-base = { $basis ->
+    [oiv] By OIV, { $alcohol } % vol{ $known ->
+        [yes] {""}
+       *[no] {" "}(not told)
+    }, 20 °C
+   *[other] By pK { $pK }
+}: { $molecular ->
+    [none] { $target } needs { $needed } free.
+   *[other] { $molecular } molecular; { $target } needs { $needed } free.
+}
+molecular-meaning = By pK 1.81 the same target takes { $times } times the free SO2: { $dose } { $unit } to add, by OIV { $other }. Published targets rest on pK 1.81; { $basis ->
+    [oiv] this cellar’s doses go by OIV.
+   *[other] so do this cellar’s doses.
+}
+
+# This wine: what it bound, when it needs more, too much, blending
+
+lab-lacks = { $vessel }: { $what ->
+    [ph] no pH on file. Send one, like: T4 pH 3.58 free 21
+    [free] no free SO2 on file. Send it, like: T4 free 21
+    [total] no total SO2 on file. Send it, like: T4 total 80
+   *[target] no target holds for it as it is; nothing is reckoned.
+}
+learned = This wine bound { $share } % (± { $spread }) of its last { $count } additions.
+learned-offer = This wine bound { $share } % (± { $spread }) of its last { $count } additions. By that: { $amount ->
+    [none] { $dose } { $unit }
+   *[other] { $amount } ({ $dose } { $unit })
+}. Yours to choose.
+forecast-below = { $vessel }: free SO2 falls below { $needed } { $unit } { $day ->
+    [far] in more than two years
+   *[other] about { $day }
+}{ $from ->
+    [now] , and may be below already.
+    [far] .
+   *[other] {" "}({ $by ->
+        [readings] 9 of 10: {""}
+       *[published] {""}
+    }{ $from } to { $to ->
+        [far] more than two years
+        [never] perhaps never
+       *[other] { $to }
+    }).
+}
+forecast-steady = { $vessel }: by its readings free SO2 does not fall; { $from ->
+    [now] measure to be sure.
+    [far] below { $needed } { $unit } in two years at the earliest.
+   *[other] below { $needed } { $unit } on { $from } at the earliest.
+}
+forecast-by-readings = By { $count } readings since the last addition: { $lost } % lost in 30 days.
+forecast-by-rates = { $container ->
+    [bottle] By a study of bottles, not by this wine: after 3 years 45 % left at 14 °C, 20 % at 15–26 °C.
+   *[other] By what barrels lose, not by this wine: 3–10 mg/L a month (common practice, no source). { $fewest } readings tell its own; there are { $count }.
+}
+forecast-measure = { $from ->
+    [now] Measure now.
+    [far] Measure as usual.
+   *[other] Measure by { $from }.
+}
+forecast-need = It needs { $needed }: pH { $ph } of { $day }, { $molecular } molecular.
+forecast-none = { $vessel }: { $why ->
+    [unmeasured] no free SO2 measured since its last addition. Measure it, then ask again.
+    [below-already] free SO2 is at or below the { $needed } { $unit } that its pH asks for. Send the reading for a dose.
+   *[no-rate] no forecast yet. No rate of loss in tanks is on file, and its own takes { $fewest } readings since the last addition; there { $count ->
+        [1] is 1
+       *[other] are { $count }
+    }.
+}
+forecast-unlanded = { $vessel }: the last addition has not landed yet. Measure free SO2 first.
+blend-share = { $vessel } with { $other }: { $least ->
+    [0] as it is { $vessel } keeps to the bounds; up to { $most } % { $other } may come in.
+   *[other] from { $least } to { $most } % of { $other } in the blend.
+}{ $volume ->
+    [none] {""}
+   *[other] {" "}The least is { $volume } of { $other } to all of { $vessel }{ $enough ->
+        [no] ; it holds only { $held }.
+       *[yes] .
+    }
+}
+blend-candidates = Others that would bring { $vessel } within its bounds, the least share first:
+blend-candidate = { $other }: { $least }–{ $most } %{ $volume ->
+    [none] {""}
+   *[other] , at least { $volume }{ $enough ->
+        [no] {" "}(it holds { $held })
+       *[yes] {""}
+    }
+}
+blend-nobody = None of { $count } other vessels with a reading brings { $vessel } within its bounds.
+blend-fails = { $vessel } with { $other }: no share does: { $fails ->
+    [total] the total stays over the limit.
+    [free] free SO2 stays over the limit.
+    [molecular] molecular SO2 stays out of its bounds.
+   *[unmeasured] something of one wine is not measured.
+}
+blend-figures = By free SO2 on file: { $list }.
+blend-figure = { $vessel } { $free } ({ $day })
+blend-bounds = Kept to: { $list }.
+blend-bound-total = total at most { $limit }
+blend-bound-no-total = no total (one is not measured)
+blend-bound-free = free at most { $limit }
+blend-bound-molecular = molecular { $least ->
+    [none] at most { $most }
+   *[other] { $least }–{ $most }
+}, at whichever pH of the two is worse
+blend-bound-no-ph = no molecular (one pH is not measured)
+blend-whole = All of both, { $volume }: { $free ->
+    [none] free not known
+   *[other] free { $free }
+}, { $total ->
+    [none] total not known
+   *[other] total { $total }
+}, before binding moves.
+blend-care = The pH of a blend is not reckoned: mix a glass in that share, measure pH, free and total, then decide. Other limits of both wines count too.
+too-much-head = { $vessel }: { $free ->
+    [none] free not measured
+   *[other] free { $free }
+}{ $total ->
+    [none] {""}
+   *[other] , total { $total }
+}{ $molecular ->
+    [none] {""}
+   *[other] , molecular { $molecular }
+}. First measure again: one figure is often wrong.
+too-much-wait = Waiting: { $container ->
+    [barrel] barrels lose { $least }–{ $most } mg/L free a month (common practice, no source).
+    [bottle] bottles lose it over years; nothing can be taken out.
+   *[tank] no rate of loss in tanks is on file; barrels lose { $least }–{ $most } mg/L free a month (common practice, no source).
+} The total hardly falls.
+too-much-air = Air, a splashing racking: 1 mg/L oxygen takes up to { $each } mg/L (theory), a wine full of air { $low }–{ $high } (an amateur article). It ages the wine.
+too-much-blend = Blending takes down the total too: blend { $vessel }
+too-much-peroxide = Peroxide: { $says ->
+    [listed] on the list of Australia, at most { $left } mg/L left (AWRI, at that time).
+    [not-listed] not permitted in the EU (AWRI, at that time).
+    [old-text] an older US table has it for narrow uses only; to be checked (27 CFR 24.246, 24.247).
+   *[none] no text of your market is on file.
+} Ask your authority and a qualified oenologist first; I give no amounts.

@@ -1,4 +1,5 @@
 import type { CellarView } from '../../core/cellar/cellar-store.ts';
+import { mustFigures } from '../../core/dose/must-ranges.ts';
 import { finishReading } from '../reader/finish-reading.ts';
 import type { Reading } from '../reader/understood.ts';
 import type { DecimalMark } from '../replies/number-text.ts';
@@ -10,6 +11,7 @@ import { complete } from './complete.ts';
 import { takeImport } from './handle-file.ts';
 import { withVessels, type Here } from './here.ts';
 import { readingKey } from './keys.ts';
+import { stay, stayingWith } from './language.ts';
 import { line } from './lines/line.ts';
 import { questionLine } from './lines/question.ts';
 import { vesselText } from './lines/vessel.ts';
@@ -35,6 +37,8 @@ import { withShelves } from './with-shelves.ts';
 /** A button that was pressed: it means the same however often, and an old or unknown one gets a kind line. */
 export async function handlePress(key: string, here: Here, view: CellarView): Promise<Handled> {
   const { settings, message } = here;
+  const stays = stayingWith(key);
+  if (stays !== undefined) return stay(stays, here);
   const ofEntry = parseEntryKey(key);
   if (ofEntry) return pressEntry(ofEntry, here, view);
   const ofRound = parseRoundKey(key);
@@ -70,6 +74,7 @@ export async function handlePress(key: string, here: Here, view: CellarView): Pr
     case 'red':
     case 'white':
     case 'c':
+    case 'p':
     case 'l':
     case 'y':
     case 'f':
@@ -86,7 +91,7 @@ function pressed(
 ): Handled {
   const { settings } = here;
   const again = (reading: Reading, chosenNow = false): Handled =>
-    answerAgain(checkFields(reading), here, chosenNow);
+    answerAgain(checkFields(withoutRule(reading)), here, chosenNow);
   switch (does) {
     case 'w':
       return saying(settings, workingOf(found.reading, here));
@@ -99,13 +104,20 @@ function pressed(
     case 'red':
     case 'white':
       return again(complete(found.reading, { fields: { style: does } }, settings));
+    case 'p': {
+      const { marks, fields } = found.reading;
+      const add_mg_L = marks.fruitState && mustFigures(marks.fruitState, fields.style)[Number(which)];
+      if (add_mg_L === undefined) return saying(settings, [line('first', 'old-button')]);
+      return again(complete(found.reading, { fields: { target: { add_mg_L } } }, settings), true);
+    }
     case 'y':
       return claimDose(found, here);
     case 'f':
       return askFullDose(found, here);
     case 'fy': {
       const over_rule = ruleAgreedTo(found, here);
-      return again(over_rule === undefined ? found.reading : { ...found.reading, over_rule });
+      if (over_rule === undefined) return again(found.reading);
+      return answerAgain(checkFields({ ...found.reading, over_rule }), here, false);
     }
     case 't':
       return askTarget(found, here);
@@ -123,6 +135,12 @@ function pressed(
       return again(complete(found.reading, { fields }, settings));
     }
   }
+}
+
+/** That a rule may be passed was said of one dose, and of no other that is made of its reading. */
+function withoutRule(reading: Reading): Reading {
+  const { over_rule: _rule, ...fresh } = reading;
+  return fresh;
 }
 
 /** The reading as the person stated it: without a target that was the bot's own offer. */
@@ -164,7 +182,7 @@ function moreOf(found: Remembered, here: Here): Handled {
 /** Another target for a reading: it is asked for and waits, without the one before. */
 function askTarget({ ref, reading }: Remembered, here: Here): Handled {
   const { memory, settings, message } = here;
-  const { assumed: _assumed, asks: _asks, ...draft } = withoutTarget(reading);
+  const { assumed: _assumed, asks: _asks, ...draft } = withoutTarget(withoutRule(reading));
   const without = finishReading(draft, settings);
   const { waiting: _before, ...others } = memory;
   // At a stage without a usual target nothing may wait: there it is to be written whole.

@@ -12,11 +12,14 @@ import { answers, asAnswered, complete, completeWaiting } from './complete.ts';
 import { withVessels, type Here } from './here.ts';
 import { answerCommand } from './intents/command/command.ts';
 import { keepManner } from './keep-manner.ts';
+import { line } from './lines/line.ts';
 import type { Memory, Waiting } from './memory.ts';
+import { refAt } from './next-memory.ts';
 import type { Handled } from './ports.ts';
 import { handlePress } from './press.ts';
 import { parseRoundKey } from './round/round-key.ts';
-import { saysYes } from '../reader/says-yes.ts';
+import { agreement } from '../reader/agreement.ts';
+import { replying } from './replying.ts';
 import type { Settings } from './settings.ts';
 import { strengthAnswer } from './strength-answer.ts';
 import { vesselsNamed } from './vessels-named.ts';
@@ -35,6 +38,8 @@ export async function handleText(text: string, here: Here, view: CellarView): Pr
   const key = waiting ? undefined : (buttonOfMark(mark, memory) ?? agreedKey(text, memory));
   if (key !== undefined) return handlePress(key, here, view);
   if (!waiting && isNoButton(mark, memory)) return noSuchButton(mark, here);
+  if (!waiting && askedAllTheSame(memory) !== undefined && agreement(text) === 'no')
+    return replying(here, { lines: [line('first', 'full-dose-left')] });
   const understood = keepManner(read(text, mark, waiting, memory, settings), text, memory);
   const alone = figureAfterTarget(text.trim(), understood, here);
   if (alone) return alone;
@@ -45,7 +50,7 @@ export async function handleText(text: string, here: Here, view: CellarView): Pr
   const plan = only && addedAsPlanned(only, near);
   if (plan !== undefined) return handlePress(plan, near, view);
   const commanded = only.intent === 'command' ? await answerCommand(only, near, view) : undefined;
-  if (commanded) return { ...commanded, understood: whole, answers: [null] };
+  if (commanded) return { ...commanded, understood: whole, answers: commanded.answers ?? [null] };
   const told = only.intent === 'titration' ? await withRedTold(near, only, view) : near;
   return answerSingle(checked(whole), told, { completes: whole !== understood });
 }
@@ -55,10 +60,14 @@ function buttonOfMark(mark: string, { lastButtons }: Memory): string | undefined
   return /^\d{1,3}$/.test(mark) ? lastButtons[Number(mark) - 1] : undefined;
 }
 
-/** "Yes" to the question whether the full dose is to be given all the same. */
-function agreedKey(text: string, { lastButtons }: Memory): string | undefined {
-  const asked = lastButtons.find((key) => parseKey(key)?.does === 'fy');
-  return asked !== undefined && saysYes(text) ? asked : undefined;
+/** The question whether the full dose is to be given all the same, where it stands in the last reply. */
+const askedAllTheSame = ({ lastButtons }: Memory): string | undefined =>
+  lastButtons.find((key) => parseKey(key)?.does === 'fy');
+
+/** "Yes" to that question. */
+function agreedKey(text: string, memory: Memory): string | undefined {
+  const asked = askedAllTheSame(memory);
+  return asked !== undefined && agreement(text) === 'yes' ? asked : undefined;
 }
 
 /** A number that could be meant for a button, and that none has. */
@@ -76,7 +85,7 @@ function followsChoice({ lastButtons, lastWasChosen }: Memory): boolean {
 function addedAsPlanned({ fields, command }: Reading, here: Here): string | undefined {
   const { vessel } = fields;
   if (command?.name === 'full-dose')
-    return here.memory.lastButtons.find((key) => parseKey(key)?.does === 'f');
+    return here.memory.lastButtons.find((key) => parseKey(key)?.does === 'f') ?? `f:${refAt(here, -1)}`;
   if (command?.name !== 'added-it') return undefined;
   if (vessel === undefined)
     return here.memory.lastButtons.find(

@@ -3,7 +3,14 @@ import { doseButtons } from '../buttons.ts';
 import { assumedLines } from '../lines/assumed.ts';
 import { basisLines } from '../lines/basis.ts';
 import { bottledLines } from '../lines/bottled.ts';
-import { cappedFirst, designationLines, keptLine, limitValues, type Capped } from '../lines/capped.ts';
+import {
+  cappedFirst,
+  designationLines,
+  keptLine,
+  lawAssumedLines,
+  limitValues,
+  type Capped,
+} from '../lines/capped.ts';
 import { cautionLines } from '../lines/cautions.ts';
 import { expectationLines } from '../lines/expectation.ts';
 import { factLines } from '../lines/facts.ts';
@@ -51,11 +58,14 @@ export function cappedDose(reading: Reading, answer: Capped, turn: Turn): Outcom
       head,
       ...underLines(given.warnings, manner),
       ...more,
-      keptLine(answer, manner),
-      ...(reading.assumed.stage === undefined ? [] : [line('condition', 'condition-stage')]),
+      keptLine(reading, answer, manner),
+      ...(reading.assumed.stage === undefined || first === undefined
+        ? []
+        : [line('condition', 'condition-stage')]),
       ...(first === undefined ? [] : expectationLines({ ...reading, fields }, given, undefined, manner)),
       ...factLines(reading, manner),
       ...assumedLines(reading, manner, first !== undefined),
+      ...lawAssumedLines(reading, turn.settings),
       ...designationLines(reading, turn.settings),
       ...(first === undefined ? [] : basisLines(reading, given, manner)),
       ...(first === undefined ? [] : workingLines(given.steps, manner)),
@@ -67,7 +77,7 @@ export function cappedDose(reading: Reading, answer: Capped, turn: Turn): Outcom
       isCapped: true,
       stageAssumed: reading.assumed.stage !== undefined,
       mayBeRed: false,
-      colourUnknown: isColourUnknown(reading),
+      colourUnknown: isColourUnknown(reading, turn),
       cautionsShort: first !== undefined && !inFull,
     }),
     ...(inFull && additive && { cautioned: additive.id }),
@@ -75,6 +85,8 @@ export function cappedDose(reading: Reading, answer: Capped, turn: Turn): Outcom
 }
 
 /** The colour opens another limit: it is offered where nobody has told it. */
-function isColourUnknown({ fields }: Reading): boolean {
-  return fields.style === undefined && fields.product === undefined;
+function isColourUnknown(reading: Reading, { settings }: Turn): boolean {
+  return lawAssumedLines(reading, settings).some(({ list = [] }) =>
+    list.some(({ values }) => values['code'] === 'colour-assumed'),
+  );
 }

@@ -57,5 +57,5 @@ function cappedPartly(
   const isRate = first !== undefined && first.key.startsWith('dose-rate');
   if (first === undefined || (!isRate && first.key !== 'dose-at-limit')) return first ? [first, ...more] : [];
   const head = isRate ? cappedFirst(first, reading, answer, manner) : first;
-  return [head, keptLine(answer, manner), ...more];
+  return [head, keptLine(reading, answer, manner), ...more];
 }

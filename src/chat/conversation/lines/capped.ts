@@ -1,6 +1,6 @@
 import type { CappedDose, DoseAnswer } from '../../../core/dose/answer.ts';
 import { KEPT_FOR_METHOD_mg_L } from '../../../core/limits/check-limit.ts';
-import type { Limit } from '../../../core/limits/limit.ts';
+import type { Limit, LimitNote } from '../../../core/limits/limit.ts';
 import { limitsFor } from '../../../core/limits/limits-for.ts';
 import type { Reading } from '../../reader/understood.ts';
 import { numberText } from '../../replies/number-text.ts';
@@ -9,7 +9,7 @@ import type { Line } from '../../replies/reply.ts';
 import type { Manner } from '../manner.ts';
 import type { Settings } from '../settings.ts';
 import { toDoseRequest } from '../to-requests.ts';
-import { line } from './line.ts';
+import { line, listLine, part } from './line.ts';
 import { limitFigure, ruleValues } from './rule.ts';
 import { vesselText } from './vessel.ts';
 
@@ -39,6 +39,7 @@ export function limitValues(reading: Reading, answer: Capped, manner: Manner): L
     least: limit?.of === 'total' && total_mg_L === undefined ? 'yes' : 'no',
     limit: limit === undefined ? '' : limitFigure(limit, manner.mark),
     unit: manner.unit,
+    standing: limit !== undefined && now_mg_L > limit.limit_mg_L ? 'over' : 'at',
     now: numberText(now_mg_L, 1, manner.mark),
     after: concentrationText(now_mg_L + (answer.dose_mg_L ?? 0), manner.mark),
   };
@@ -55,16 +56,40 @@ export function cappedFirst(first: Line, reading: Reading, answer: Capped, manne
 }
 
 /** How much is kept below the limit, and why. */
-export function keptLine({ capped }: Capped, manner: Manner): Line {
+export function keptLine(reading: Reading, answer: Capped, manner: Manner): Line {
+  const { capped } = answer;
+  const limit = limitValues(reading, answer, manner);
+  if (limit['standing'] === 'over')
+    return line('first', 'dose-over-already', { region: limit['region'] ?? '' });
   const reserve_mg_L = capped.kept_mg_L - KEPT_FOR_METHOD_mg_L;
   const said = (value: number): string => numberText(value, 1, manner.mark);
   return line('first', 'dose-capped-kept', {
     kept: said(capped.kept_mg_L),
     error: said(KEPT_FOR_METHOD_mg_L),
+    of: limit['of'] ?? 'total',
     reserve: reserve_mg_L > 0 ? said(reserve_mg_L) : 'none',
     unit: manner.unit,
   });
 }
+
+/** What is unknown of the wine and decides its limit: it was taken at its strictest. */
+export function lawAssumedLines(
+  reading: Reading,
+  settings: Pick<Settings, 'basis' | 'region' | 'targets'>,
+): Line[] {
+  const { notes } = limitsFor(toDoseRequest(reading, settings));
+  const parts = notes
+    .filter(({ code }) => UNKNOWN.includes(code))
+    .map(({ code }) => part('law-unknown', { code }));
+  return listLine('assumed', 'law-assumed', parts);
+}
+
+const UNKNOWN: readonly LimitNote['code'][] = [
+  'colour-assumed',
+  'sugar-assumed',
+  'sparkling-class-assumed',
+  'density-assumed',
+];
 
 /** Whether a sweet wine is of a designation is asked and never inferred. */
 export function designationLines(

@@ -64,6 +64,14 @@ function mostMatters({ values }: Warning): boolean {
   return typeof rule === 'string' && !rule.startsWith('oiv') && typeof most === 'number';
 }
 
+/** That a limit is unconfirmed stands in the line that says how the wine comes near it. */
+function isSaidWith({ code, values }: Warning, warnings: readonly Warning[]): boolean {
+  if (code !== 'limit-unconfirmed') return false;
+  return warnings.some(
+    (one) => one.code !== code && one.values['rule'] === values['rule'] && one.code !== 'total-unknown',
+  );
+}
+
 /** Near a limit only because of what is kept for bottling, which the vessel's own facts say. */
 function isForBottlingOnly({ code, values }: Warning): boolean {
   const { total_after_mg_L: after, limit_mg_L: limit } = values;
@@ -82,6 +90,7 @@ export function warningLines(
     .filter(isTold)
     .filter(({ code }) => ![...RIGHT_UNDER, ...besides].includes(code))
     .filter((warning) => !isOfNoMarket(warning) && !isForBottlingOnly(warning))
+    .filter((warning) => !isSaidWith(warning, warnings))
     .filter((warning) => totalMatters(warning) || mostMatters(warning))
     .filter(({ values }) => values['measure_gives_mg_L'] === undefined) // the tablets' own line says so
     .slice(0, MOST)

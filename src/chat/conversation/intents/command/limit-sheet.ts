@@ -84,6 +84,9 @@ function sheetLines(reading: Reading, vessel: Vessel | undefined, region: Region
   ];
 }
 
+/** Units that say the same of a wine. */
+const ALIKE: readonly string[] = ['mg/L', 'ppm', 'mg/dm3'];
+
 function limitLine(limit: Limit, vessel: string, manner: Manner): Line {
   const { as_written, operator, of, uplift_mg_L = 0, density_kg_L } = limit;
   return line('first', 'limit-is', {
@@ -93,7 +96,7 @@ function limitLine(limit: Limit, vessel: string, manner: Manner): Line {
     operator: operator === '<' ? 'below' : 'at-most',
     limit: limitFigure(limit, manner.mark),
     unit: manner.unit,
-    written: as_written.unit === 'mg/L' ? 'same' : 'other',
+    written: ALIKE.includes(as_written.unit) ? 'same' : 'other',
     value: numberText(as_written.value, 3, manner.mark),
     law_unit: as_written.unit,
     density: density_kg_L === undefined ? 'none' : numberText(density_kg_L, 4, manner.mark),
