@@ -3,6 +3,7 @@ import type { StockEvent } from '../../core/cellar/entry.ts';
 import type { SaidDay, SaidWhen as SaidMoment } from '../../core/time/said-when.ts';
 import type { Region } from '../../core/limits/region.ts';
 import type { Basis } from '../../core/wine.ts';
+import type { Language } from './understood.ts';
 
 /** A moment as it was said, with the person's own words. */
 export interface SaidWhen extends SaidMoment {
@@ -25,6 +26,8 @@ export type Setting =
   | { readonly of: 'zone'; readonly zone: string }
   | { readonly of: 'allowance'; readonly percent: number }
   | { readonly of: 'basis'; readonly basis: Basis }
+  /** Litres of must from 100 kg of fruit. */
+  | { readonly of: 'yield'; readonly yield_L_per_100_kg: number | 'off' }
   | { readonly of: 'law'; readonly region: Region }
   | { readonly of: 'short-replies'; readonly on: boolean }
   | { readonly of: 'ph-days'; readonly days: number }
@@ -62,6 +65,7 @@ export type Command =
   | { readonly name: 'unwatch' } // not T4
   | { readonly name: 'watch' }
   | { readonly name: 'settings' }
+  | { readonly name: 'language'; readonly language: Language }
   | { readonly name: 'set'; readonly setting: Setting }
   /** A setting whose value cannot be; `about` is what was written. */
   | { readonly name: 'set-wrong'; readonly of: Setting['of']; readonly about: string }
@@ -92,6 +96,8 @@ export type Command =
       readonly event: StockEvent;
       readonly supplier?: string;
       readonly purpose?: string;
+      /** More than one thing was told at once. */
+      readonly several?: true;
     }
   | { readonly name: 'added-it' } // what was reckoned last, or for the vessel named, went in
   | { readonly name: 'invite'; readonly role?: SaidRole }

@@ -20,6 +20,10 @@ function timesBefore(board: Board, i: number): { readonly count: number; readonl
     : { count: 1, from: i };
 }
 
+/** Whether an amount of something stands at term `i`: `25 kg`, `10 L`. */
+export const isStockAmountAt = (board: Board, i: number): boolean =>
+  isFree(board, i) && unitAt(board, i + 1, [...MASSES, ...VOLUMES]) !== undefined;
+
 /** Finds how much of an additive is told of the store: a mass, or the volume of what is dissolved. */
 export function findStockAmount(board: Board): void {
   const isDissolved = findingOf(board, 'additive')?.value.endsWith('-solution') === true;

@@ -1,6 +1,6 @@
 import type { StockEvent } from '../../../core/cellar/entry.ts';
 import type { Board } from '../board.ts';
-import { findingOf, freshBoard, isCue, isFree, isMark, placeOf, termAt } from '../board.ts';
+import { claim, findingOf, freshBoard, isCue, isFree, isMark, termAt } from '../board.ts';
 import type { Command } from '../command.ts';
 import { draftOfBoard } from '../draft-of-board.ts';
 import { findAdditive } from '../finders/additive.ts';
@@ -13,6 +13,8 @@ import { ownPieces } from '../own-pieces.ts';
 import type { Draft } from '../understood.ts';
 import type { OwnWordId } from '../words/words.ts';
 import { findStockAmount } from './stock-amount.ts';
+import type { Stretch } from './stretch-behind.ts';
+import { stretchBehind } from './stretch-behind.ts';
 import type { Talk } from './talk.ts';
 import { says } from './talk.ts';
 
@@ -28,40 +30,10 @@ const OPENERS = {
 const OPENING = Object.keys(OPENERS) as (keyof typeof OPENERS)[];
 
 /** Words that may stand beside an amount and its additive. */
-const ALLOWED: readonly OwnWordId[] = ['filler', 'courtesy', 'of', 'some', 'in-store', 'is', 'left', 'now', 'for', 'stock', 'ask', 'show', 'still', 'has']; // prettier-ignore
+const ALLOWED: readonly OwnWordId[] = ['spoilt', 'filler', 'courtesy', 'of', 'some', 'in-store', 'is', 'left', 'now', 'for', 'stock', 'ask', 'show', 'still', 'has']; // prettier-ignore
 
 /** What may be found: a pH, a volume of wine, a vessel beside it, and it tells of wine. */
 const OF_STOCK = new Set(['additive', 'strength_percent', 'tablet_SO2_g', 'tablet_salt_g', 'tablets', 'mass_g', 'additive_volume_mL']); // prettier-ignore
-
-/** Longer names and purposes nobody types; own threshold. */
-const LONGEST = 60;
-
-/** The words behind a small word up to a lot, a moment, a comma or the end, as they were written. */
-interface Stretch {
-  readonly from: number;
-  readonly to: number;
-  readonly text: string;
-}
-
-function stretchBehind(board: Board, opener: Piece): Stretch | undefined {
-  const seen = freshBoard(board, { tells: true });
-  findWhen(seen);
-  const behind = board.pieces.slice(board.pieces.indexOf(opener) + 1);
-  const ends = behind.findIndex(
-    (piece) =>
-      piece.ids.includes('lot') ||
-      seen.ofWhen?.has(piece) === true ||
-      piece.kind === 'break' ||
-      /^[,;!]$/.test(piece.text),
-  );
-  const words = ends < 0 ? behind : behind.slice(0, ends);
-  const last = words.at(-1);
-  if (last === undefined) return undefined;
-  const to = last.text === '.' ? last.to - 1 : last.to;
-  const text = placeOf(board, opener.from, to).text.slice(opener.text.length).trim();
-  const isSaid = /\p{L}{2}/u.test(text) && text.length <= LONGEST;
-  return isSaid ? { from: opener.from, to, text } : undefined;
-}
 
 /** Whom it came from; a vessel is no supplier. */
 function supplierIn(board: Board): Stretch | undefined {
@@ -79,8 +51,12 @@ function purposeIn(board: Board): Stretch | undefined {
   return opener && stretchBehind(board, opener);
 }
 
+/** Why it was thrown away: `because it was caked`, `, caked`. */
 function reasonIn(board: Board): Stretch | undefined {
-  const opener = board.pieces.find(({ ids }) => ids.includes('because'));
+  const { pieces } = board;
+  const opener = pieces.find(
+    ({ ids, text }, k) => ids.includes('because') || (text === ',' && pieces[k + 1]?.ids.includes('spoilt')),
+  );
   return opener && stretchBehind(board, opener);
 }
 
@@ -98,6 +74,26 @@ function foundWithout(board: Board, cuts: readonly (Pick<Stretch, 'from' | 'to'>
     find(own);
   return own;
 }
+
+/** `stock kmbs 3.2`: an amount whose unit is missing is asked for. */
+function claimBareFigure(board: Board): void {
+  const bare = board.terms.flatMap((_, i) => (isFree(board, i) ? [i] : []));
+  const [only, another] = bare;
+  if (
+    only !== undefined &&
+    another === undefined &&
+    !isMark(board, only - 1, ',') &&
+    isNamed(board) &&
+    !hasAmount(board)
+  )
+    claim(board, only, only);
+}
+
+/** `25 kg kmbs and 5 kg smbs`: two things, of which a message notes one. */
+const isOfSeveral = ({ findings }: Board): boolean =>
+  (['additive', 'mass_g', 'additive_volume_mL', 'tablets'] as const).some(
+    (name) => findings.filter(({ field }) => field === name).length > 1,
+  );
 
 /** Whether every word that nothing was found in is one that may stand there. */
 const isRead = (board: Board): boolean =>
@@ -126,9 +122,13 @@ const hasAmount = (board: Board): boolean =>
 const isOfSolution = (board: Board, opener: Piece): boolean =>
   isCue(board, opener.to + 1, 'solution') || board.terms.some((_, i) => isMark(board, i, '%'));
 
-/** `how much kmbs is left`, `kmbs stock`: what is there of it. */
+/** `how much kmbs is left`, `kmbs stock`: what is there of it; `3.2 kg kmbs left` tells it. */
 function askedFor(talk: Talk): Draft | undefined {
   if (!says(talk, 'in-store', 'stock')) return undefined;
+  const told = foundWithout(talk.board, []);
+  const isTold = !talk.isQuestion && hasAmount(told) && isNamed(told) && isRead(told);
+  if (isTold && told.findings.every(({ field }) => OF_STOCK.has(field)) && !says(talk, 'stock', 'ask'))
+    return { ...draftOfBoard(told, 'command'), command: { name: 'stock-note', event: 'counted' } };
   // `kmbs stock` names no solution.
   const own = foundWithout(
     talk.board,
@@ -167,15 +167,17 @@ export function readStock(talk: Talk): Draft | undefined {
   ];
   if (opener === 'used-up' && purpose === undefined) return undefined;
   const own = foundWithout(board, [{ from: first.from, to: first.to }, supplier, purpose, reason]);
+  if (opener === 'stock' || opener === 'counted') claimBareFigure(own);
   if (!isRead(own) || !own.findings.every(({ field }) => OF_STOCK.has(field))) return undefined;
-  if (isStock && !hasAmount(own)) return shown(own);
+  if (isStock && !hasAmount(own) && own.terms.every(({ kind }) => kind !== 'number')) return shown(own);
   if (!isNamed(own) || isQuestion) return undefined;
-  const said_ = purpose ?? reason;
+  const why = purpose ?? reason;
   const command: Command = {
     name: 'stock-note',
     event: OPENERS[opener],
+    ...(isOfSeveral(own) && { several: true }),
     ...(supplier && { supplier: supplier.text }),
-    ...(said_ && { purpose: said_.text }),
+    ...(why && { purpose: why.text }),
   };
   return { ...draftOfBoard(own, 'command'), command };
 }

@@ -458,6 +458,10 @@ export const en: Words = {
       'elderberry wine', 'apple wine', 'blueberry wine', 'raspberry wine', 'peach wine', 'strawberry wine',
       'country wine', 'rhubarb wine', 'currant wine', 'blackcurrant wine', 'gooseberry wine',
     ],
+    'product:alcohol-free': [
+      'alcohol free wine', 'alcohol free wines', 'non alcoholic', 'nonalcoholic', 'non alcoholic wine', 'nonalcoholic wine',
+      'dealcoholised', 'dealcoholized', 'de alcoholised', 'de alcoholized', 'dealcoholised wine', 'dealcoholized wine',
+    ],
     organic: [
       'organic', 'organics', 'bio', 'organically grown', 'organc', 'certified organic', 'biodynamic organic',
       'ecologico', 'biologico',
@@ -579,6 +583,7 @@ export const en: Words = {
     lab: ['lab', 'laboratory', 'titration', 'titrations', 'burette', 'ripper', 'aeration', 'analysis'],
   },
   own: {
+    language: ['language', 'answer in', 'reply in', 'speak', 'talk', 'write in'],
     'lab-aeration': ['ao', 'a o', 'aeration', 'aeration oxidation', 'aspiration', 'aspiration method'],
     'lab-iodine': ['ripper', 'ripper titration', 'iodine', 'iodometric', 'iodimetric', 'iodine titration'],
     'lab-naoh': ['naoh', 'sodium hydroxide', 'caustic soda'],
@@ -629,6 +634,7 @@ export const en: Words = {
     'last-night': ['last night', 'yesterday evening', 'yesterday morning', 'yesterday afternoon', 'yesterday night', 'late yesterday', 'early yesterday'],
     'before-yesterday': ['day before yesterday', 'the day before yesterday', 'two days ago'],
     'part-of-day': ['morning', 'afternoon', 'evening', 'night'],
+    yield: ['yield', 'press yield', 'yields', 'yield of', 'yield is', 'a yield of', 'expected yield'],
     sheet: ['sheet', 'day sheet', 'log', 'day log', 'additions', 'entries', 'journal'],
     tomorrow: ['tomorrow', 'until tomorrow', 'till tomorrow'],
     'next-week': ['next week', 'until next week', 'till next week', 'for a week'],
@@ -830,6 +836,7 @@ export const en: Words = {
     'used-up': ['used', 'have used', 'took', 'used up'],
     discarded: ['discarded', 'threw away', 'threw out', 'thrown away', 'thrown out', 'disposed of', 'disposed', 'binned', 'got rid of'],
     counted: ['counted', 'count', 'on the shelf', 'weighed', 'there is', 'there are'],
+    spoilt: ['old', 'caked', 'damp', 'wet', 'expired', 'clumped', 'lumpy', 'spoilt', 'spoiled', 'torn', 'too old', 'out of date'],
     supplier: ['from', 'supplier', 'supplied by', 'bought from'],
     'for-equipment': [
       'rinsing', 'rinse', 'cleaning', 'clean', 'sanitizing', 'sanitising', 'sanitize', 'sanitise', 'washing', 'wash', 'sterilizing', 'sterilising', 'disinfecting', 'soaking', 'soak', 'equipment',
@@ -844,6 +851,7 @@ export const en: Words = {
     'count-5': ['five'],
     'count-6': ['six'],
   },
+  languages: { en: ['english', 'en'], es: ['spanish'], fr: ['french'], it: ['italian'], de: ['german'], pt: ['portuguese'] },
   months: [
     ['january', 'jan'], ['february', 'feb'], ['march', 'mar'], ['april', 'apr'], ['may'], ['june', 'jun'], ['july', 'jul'],
     ['august', 'aug'], ['september', 'sep', 'sept'], ['october', 'oct'], ['november', 'nov'], ['december', 'dec'],

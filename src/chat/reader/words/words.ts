@@ -70,7 +70,7 @@ export type OwnWordId =
   | 'sampled' | 'at' | 'on' | 'until' | 'moment-bar' | 'this-morning' | 'last-night' | 'part-of-day' | 'ago' | 'ago-before' | 'am'
   | 'pm' | 'oclock' | 'noon' | 'hour' | 'minute' | 'day' | 'week' | 'ordinal'
   | 'picture' | 'round' | 'weigh-sheet' | 'added-it' | 'done' | 'invite' | 'keeper' | 'hand' | 'guest' | 'as-role' | 'people' | 'remove' | 'make-role' | 'join' | 'at-cellar' | 'cellars'
-  | 'cellar-is' | 'name-cellar' | 'read-along' | 'only-called'
+  | 'cellar-is' | 'name-cellar' | 'read-along' | 'only-called' | 'language'
   | 'stock' | 'in-store' | 'how-much' | 'received' | 'used-up' | 'discarded' | 'counted' | 'supplier' | 'for-equipment' | 'spoilt'
   | 'lab-aeration' | 'lab-iodine' | 'lab-naoh' | 'lab-iodate' | 'lab-titration' | 'lab-sample' | 'lab-titrant' | 'lab-blank' | 'lab-ascorbic' | 'lab-normal' | 'lab-molar'
   | 'lab-range' | 'lab-table' | 'lab-molecular' | 'lab-so2' | 'lab-forecast' | 'lab-blend' | 'lab-too-much'
@@ -107,6 +107,8 @@ export interface Words {
   readonly own?: Readonly<Partial<Record<OwnWordId, readonly string[]>>>;
   /** What help is asked about, in the order in which the topics are listed. */
   readonly topics?: Readonly<Partial<Record<HelpTopic, readonly string[]>>>;
+  /** What the languages are called in this one, by their codes; the code of its own too. */
+  readonly languages?: Readonly<Partial<Record<Language, readonly string[]>>>;
   /** The names of the months in their order, January first; each the whole word and what shortens it. */
   readonly months?: readonly (readonly string[])[];
   /** The days of the week in their order, Monday first; no shortening that is also another word. */

@@ -55,7 +55,13 @@ export async function noteStock(
   const lacks = lackOf(reading, command);
   if (lacks !== undefined)
     return replying(here, {
-      lines: [line('first', 'stock-lacks', { what: lacks, additive: reading.fields.additive ?? '' })],
+      lines: [
+        line('first', 'stock-lacks', {
+          what: lacks,
+          event: command.event,
+          additive: reading.fields.additive ?? '',
+        }),
+      ],
     });
   const unclear = whenIsUnclear(reading, { here });
   if (unclear) return replying(here, { lines: unclear.lines });
@@ -69,7 +75,8 @@ export async function noteStock(
 }
 
 /** What has to be known of it and was not said. */
-function lackOf({ fields, marks }: Reading, { event }: StockNote): string | undefined {
+function lackOf({ fields, marks }: Reading, { event, several }: StockNote): string | undefined {
+  if (several) return 'one';
   const { additive, mass_g, additive_volume_mL, tablets, tablet_SO2_g, tablet_salt_g } = fields;
   if (additive === undefined || marks.unnamedAdditive) return 'additive';
   const isDissolved = additive.endsWith('-solution');
