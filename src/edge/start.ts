@@ -4,22 +4,24 @@ import { loadEnvironment } from './environment.ts';
 import { createOperator } from './operator.ts';
 import { readStartOptions } from './start-options.ts';
 import { stopSignal } from './stop-signal.ts';
+import { withdrawSecrets } from './withdraw-secrets.ts';
 
 /**
  * Does what the command line asks for. Mostly it joins the parts and serves: on Telegram where a token is set, else in the
  * terminal, and the demo there always. Resolves at a clean stop.
  */
 export async function start(args: readonly string[]): Promise<void> {
-  let operator = createOperator(process.env['BOT_TOKEN']);
+  const set = withdrawSecrets();
+  let operator = createOperator(set['BOT_TOKEN']);
   process.on('uncaughtException', (fault) => operator.end(fault));
 
   const options = readStartOptions(args);
   if (options.does === 'demo') {
     const { startDemo } = await import('./demo/start-demo.ts');
     // Nothing that is set for a real cellar is looked at.
-    return startDemo({ environment: process.env, operator, signal: stopSignal() });
+    return startDemo({ environment: set, operator, signal: stopSignal() });
   }
-  const environment = loadEnvironment(process.cwd(), process.env);
+  const environment = loadEnvironment(process.cwd(), set);
   operator = createOperator(environment['BOT_TOKEN']);
   const config = await readConfig(environment);
 
