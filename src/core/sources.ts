@@ -63,6 +63,8 @@ export const SOURCES = {
     title: 'agriculture press association of Campania, art. 29: aqueous SO2 in use 5 to 8 %',
     read: true,
   },
+  'reussir-vigne': { title: 'Réussir Vigne, consultants’ answers on sulphiting', read: true },
+  'german-trade-text-2012': { title: 'a German trade text of 2012 on SO2 in must', read: true },
   'food-additives-data-book': {
     title: 'Food Additives Data Book, p. 780',
     read: true,
@@ -94,6 +96,10 @@ export const SOURCES = {
   },
   'bottle-study-quebec': {
     title: 'a Quebec wine site that reports a study: free SO2 left after three years in bottle',
+    read: true,
+  },
+  'cfr-24-old-table': {
+    title: 'an older table of wine treatments of 27 CFR (now 24.246 and 24.247, to be checked)',
     read: true,
   },
   'awri-tn06': { title: 'AWRI Technical Note TN06, hydrogen peroxide', read: true },

@@ -6,6 +6,7 @@ import type { RoundSheet } from '../attachments/round/round-sheet.ts';
 import type { TotalToFetch } from '../../core/dose/totals-to-fetch.ts';
 import type { Language, Understood } from '../reader/understood.ts';
 import type { Reply } from '../replies/reply.ts';
+import type { BesideDose, LabAnswer } from './lab/lab-answer.ts';
 import type { Settings } from './settings.ts';
 
 /** Whom a conversation is with. A cellar may be several chats and people. */
@@ -75,7 +76,14 @@ export interface PlaceChange {
 }
 
 /** What core answers to one reading. */
-export type Answer = DoseAnswer | EffectAnswer | AddedAnswer | SolutionAnswer | TitrationAnswer;
+export type Answer =
+  | DoseAnswer
+  | EffectAnswer
+  | AddedAnswer
+  | SolutionAnswer
+  | TitrationAnswer
+  | (DoseAnswer & BesideDose)
+  | LabAnswer;
 
 /** What a round takes of each additive, and how many of its lines have no amount because something is wrong, missing or to be chosen. */
 export interface RoundData {

@@ -10,6 +10,7 @@ export function vesselsNamed({ readings, shared }: Pick<Understood, 'readings' |
   const own = readings.flatMap(({ fields, command }) => [
     ...vesselsIn(fields),
     ...(command && 'to' in command ? [command.to] : []),
+    ...(command?.name === 'blend' && command.other !== undefined ? [command.other] : []),
   ]);
   return [...vesselsIn(shared), ...own];
 }

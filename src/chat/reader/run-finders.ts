@@ -2,6 +2,7 @@ import type { Board, Finder } from './board.ts';
 import { findAdditiveVolume } from './finders/additive-volume.ts';
 import { findAdditive } from './finders/additive.ts';
 import { findAllowance } from './finders/allowance.ts';
+import { findFruitState, findYield } from './finders/fruit.ts';
 import { findBarrels } from './finders/barrels.ts';
 import { findLawFacts } from './finders/law-facts.ts';
 import { findKind } from './finders/kind.ts';
@@ -31,6 +32,7 @@ import { settleBounds } from './refine/bounds.ts';
 import { settleConflicts } from './refine/conflicts.ts';
 import { readUnlabelled } from './refine/unlabelled.ts';
 import { findChemicalLot } from './finders/chemical-lot.ts';
+import { findPlusMinus } from './finders/plus-minus.ts';
 import { findWhen } from './finders/when.ts';
 
 /** From the most certain to the least: what one has claimed, no later one reads. */
@@ -39,6 +41,7 @@ const FINDERS: readonly Finder[] = [
   findPastTense,
   findChemicalLot,
   findWhen,
+  findPlusMinus,
   findLetterPair,
   findVessel,
   findLawFacts,
@@ -47,6 +50,7 @@ const FINDERS: readonly Finder[] = [
   findOtherQuantities,
   findAllowance,
   findSpoon,
+  findYield,
   findRate,
   findTablets,
   findBarrels,
@@ -55,6 +59,7 @@ const FINDERS: readonly Finder[] = [
   findAdditiveVolume,
   findVolume,
   findMass,
+  findFruitState,
   findNumberWord,
   findWay,
   findTarget,

@@ -1,4 +1,5 @@
 import type { AdditiveId } from '../../core/additives/additive-id.ts';
+import type { FruitState } from '../../core/dose/must-ranges.ts';
 import type { Problem } from '../../core/problem.ts';
 import type { Command, SaidWhen } from './command.ts';
 import type { SaidTitration } from './titration/said-titration.ts';
@@ -69,6 +70,8 @@ export interface Assumed {
   readonly volume_L?: number;
   /** The share that the cellar adds to doses from a target. */
   readonly binding_allowance_percent?: number;
+  /** Litres of must from 100 kg of fruit, as the cellar has set it. */
+  readonly yield_L_per_100_kg?: number;
   /** Present where a gallon was read without saying which. */
   readonly gallon?: 'US' | 'imperial';
 }
@@ -134,6 +137,14 @@ export interface Marks {
   concentrationUnit?: 'ppm' | 'mg/L' | 'g/hL';
   /** A weight of fruit stood in the place of a volume. */
   fruitByWeight?: true;
+  /** That weight, in kg. */
+  fruit_kg?: number;
+  /** Litres of must from 100 kg of it, as stated. */
+  yield_L_per_100_kg?: number;
+  /** Tons are short ones: the yield is in US gallons. */
+  shortTon?: true;
+  /** How sound the fruit is. */
+  fruitState?: FruitState;
   /** An amount stood per weight of fruit (`7 g per 100 kg`). */
   fruitRate?: true;
   /** A cask without a usual size was named. */
@@ -157,6 +168,10 @@ export interface Marks {
   acid?: true;
   /** Something of it is still to come: the person’s own word for when. */
   toCome?: string;
+  /** How far the dose may be off is asked; how sure the pH is (no unit), and the free SO2. */
+  wantsRange?: true;
+  ph_plus_minus?: number; // no unit
+  free_plus_minus_mg_L?: number;
   /** The volume was asked about: what was said, and what the vessel is known to hold, in litres. */
   volumeChoices?: readonly number[];
 }
@@ -231,6 +246,8 @@ export interface ReaderSettings {
   readonly usualAdditive: AdditiveId;
   /** Its strength, where it is not pure. */
   readonly usualStrength?: { readonly strength_percent: number; readonly strength_of?: 'salt' };
+  /** Litres of must from 100 kg of fruit, where the cellar has set it. */
+  readonly yield_L_per_100_kg?: number;
   readonly temperatureUnit: 'C' | 'F';
   readonly volumeUnit: VolumeUnit;
   /** Usual molecular targets in mg/L. */

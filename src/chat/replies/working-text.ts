@@ -29,6 +29,7 @@ function withMark(text: string, mark: DecimalMark): string {
  */
 export function expressionText(expression: string, mark: DecimalMark, unit: 'mg/L' | 'ppm' = 'mg/L'): string {
   const written = expression
+    .replaceAll('sqrt(', '√(')
     .replaceAll(' * ', ' × ')
     .replaceAll(' / ', ' ÷ ')
     .replaceAll(' - ', ' − ')

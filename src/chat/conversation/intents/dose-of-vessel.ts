@@ -6,6 +6,8 @@ import type { Line } from '../../replies/reply.ts';
 import { vesselName } from '../../replies/vessel-name.ts';
 import { planKey } from '../keys.ts';
 import { landedLines } from '../lines/landed.ts';
+import { withLearned } from '../lab/with-learned.ts';
+import { withRange } from '../lab/with-range.ts';
 import { line } from '../lines/line.ts';
 import { onItLines } from '../lines/on-it.ts';
 import type { Outcome, Turn } from '../outcome.ts';
@@ -24,7 +26,7 @@ import { dosedAlready } from './dosed-already.ts';
 export function answerDoseOfVessel(reading: Reading, turn: Turn): Outcome {
   const dosed = dosedAlready(reading, turn);
   if (dosed) return dosed;
-  const outcome = answerDose(reading, turn);
+  const outcome = withLearned(reading, withRange(reading, answerDose(reading, turn), turn), turn);
   const landed = landedAt(reading, turn);
   const news = [...emptyLines(reading, turn), ...landed, ...onItLines(reading, turn.here)];
   const isLanding = landed.length > 0 && saidFields(reading).target === undefined;

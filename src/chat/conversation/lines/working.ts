@@ -25,6 +25,14 @@ function isPlainVolume({ name, substituted }: Step): boolean {
   return name === 'volume-in-litres' && !substituted.includes('gal');
 }
 
+/** Each line with its name, the numbers put in without the units that they share. */
+export function namedWorking(steps: readonly Step[], manner: Pick<Manner, 'mark' | 'unit'>): Line[] {
+  return steps.flatMap((step) => [
+    line('first', `step-${step.name}`),
+    line('first', 'working', shortValues(step, manner)),
+  ]);
+}
+
 /** The whole working: each line with its name, its formula in words, the numbers put in, and the source. */
 export function wholeWorking(steps: readonly Step[], manner: Pick<Manner, 'mark' | 'unit'>): Line[] {
   return steps.flatMap((step, at) => [

@@ -11,6 +11,8 @@ import { readExport } from './export.ts';
 import { readImport } from './import.ts';
 import { readJoin } from './join.ts';
 import { readLimit } from './limit.ts';
+import { readLab } from './lab.ts';
+import { readLanguage } from './language.ts';
 import { readLater } from './later.ts';
 import { readOrder } from './order.ts';
 import { readPersonWord } from './person-word.ts';
@@ -27,10 +29,12 @@ const MOST_TERMS = 24;
 
 const LONG: readonly ((talk: Talk) => Command | undefined)[] = [readStrike, readImport, readJoin];
 const SHORT: readonly ((talk: Talk) => Command | undefined)[] = [
+  readLab,
   readPlain,
   readDay,
   readLater,
   readExport,
+  readLanguage,
   readSetting,
   readPersonWord,
   readCellarWord,
@@ -41,17 +45,21 @@ const OPENERS: ReadonlySet<OwnWordId> = new Set([
   'show', 'vessels', 'today', 'yesterday', 'last-night', 'before-yesterday', 'sheet', 'what-was-added', 'history', 'undo', 'strike',
   'order', 'orders', 'open', 'due', 'later', 'remind', 'not', 'unwatch', 'watch', 'settings', 'export', 'import', 'backup', 'forget',
   'forget-me', 'units', 'work-in', 'metric', 'us', 'imperial', 'usual', 'usual-bare', 'reds', 'whites', 'sweets', 'target', 'quiet', 'daily',
-  'zone', 'we-are-in', 'allowance', 'basis', 'replies', 'counts', 'every',
+  'zone', 'we-are-in', 'allowance', 'basis', 'yield', 'replies', 'counts', 'every',
   'picture', 'round', 'added-it', 'done', 'invite', 'keeper', 'hand', 'guest', 'people', 'remove', 'join', 'at-cellar', 'cellars', 'cellar-is', 'name-cellar',
-  'read-along', 'only-called', 'law', 'limit', 'full-dose', 'yes',
+  'read-along', 'only-called', 'language', 'law', 'limit', 'full-dose', 'yes',
   'stock', 'received', 'used-up', 'discarded', 'counted', 'in-store',
+  'lab-range', 'lab-table', 'lab-molecular', 'lab-forecast', 'lab-blend', 'lab-too-much',
 ]); // prettier-ignore
 
 /** Whether a message could be talk to the bot at all: one of its own words opens it, it is a day, or asks for a vessel. */
 const mayBeTalk = (board: Board): boolean =>
   board.pieces.some(
-    ({ ids, month, weekday }) =>
-      ids.some((id) => OPENERS.has(id)) || month !== undefined || weekday !== undefined,
+    ({ ids, text, month, weekday }) =>
+      ids.some((id) => OPENERS.has(id)) ||
+      month !== undefined ||
+      weekday !== undefined ||
+      board.lexicon.languages.has(text),
   ) ||
   isMark(board, 0, '/') ||
   (isMark(board, board.terms.length - 1, '?') && board.terms.length <= 6) ||

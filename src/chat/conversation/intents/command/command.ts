@@ -1,6 +1,7 @@
 import type { CellarView } from '../../../../core/cellar/cellar-store.ts';
 import type { Reading } from '../../../reader/understood.ts';
 import { withVessels, type Here } from '../../here.ts';
+import { setLanguage } from '../../language.ts';
 import { line } from '../../lines/line.ts';
 import { vesselText } from '../../lines/vessel.ts';
 import type { Handled } from '../../ports.ts';
@@ -13,6 +14,12 @@ import { drawPicture } from './picture.ts';
 import { daySheet, historySheet } from './sheets.ts';
 import { forgetPerson } from './forget-person.ts';
 import { limitSheet } from './limit-sheet.ts';
+import { tellBlend } from '../../lab/blend.ts';
+import { tellForecast } from '../../lab/forecast.ts';
+import { tellMolecular } from '../../lab/molecular.ts';
+import { tellRange } from '../../lab/range.ts';
+import { tellTable } from '../../lab/table.ts';
+import { tellTooMuch } from '../../lab/too-much.ts';
 import { listVessels, listDue, listOrders } from './lists.ts';
 import { lastSheet } from '../../round/take-sheet.ts';
 import { setSetting, settingWrong, showSettings } from './settings.ts';
@@ -20,6 +27,12 @@ import { noteStock, showStock } from './stock.ts';
 import { strikeEntry, undoEntry } from './undo.ts';
 import { takeAway } from './take-away.ts';
 import { vesselSheet } from './vessel-sheet.ts';
+
+/** What a chat is told as a whole is in its own language, whoever asks. */
+const inChatLanguage = (here: Here): Here => ({
+  ...here,
+  settings: { ...here.settings, language: here.chatLanguage },
+});
 
 /**
  * One of the bot's own words: it looks the answer up. Undefined for statements about vessels and for orders, which are
@@ -41,7 +54,9 @@ export async function answerCommand(
     case 'open':
       return listOrders(here, view);
     case 'day':
-      return daySheet(command.day, here, view);
+      return daySheet(command.day, inChatLanguage(here), view);
+    case 'language':
+      return setLanguage(command.language, here, view);
     case 'history':
       return historySheet(fields.vessel, here, view);
     case 'undo':
@@ -75,6 +90,18 @@ export async function answerCommand(
       return showStock(fields.additive, here, view);
     case 'stock-note':
       return noteStock(reading, command, here, view);
+    case 'range':
+      return tellRange(fields.vessel, here, view);
+    case 'table':
+      return tellTable(command, here);
+    case 'molecular':
+      return tellMolecular(fields.vessel, here);
+    case 'forecast':
+      return tellForecast(fields.vessel, here);
+    case 'blend':
+      return tellBlend(command, here, view);
+    case 'too-much':
+      return tellTooMuch(fields.vessel, here);
     case 'added-it':
       return replying(here, { lines: [line('first', 'added-it-none', { vessel: vesselText(reading) })] });
     case 'invite':

@@ -1,0 +1,54 @@
+import { doseFor } from '../../../core/binding/allowance.ts';
+import { learnedOf } from '../../../core/cellar/learned-of.ts';
+import type { DoseAnswer } from '../../../core/dose/answer.ts';
+import { amountFor } from '../../../core/additives/amount-for.ts';
+import { BOUNDS } from '../../../core/bounds.ts';
+import type { Reading } from '../../reader/understood.ts';
+import { numberText } from '../../replies/number-text.ts';
+import { concentrationText, massText } from '../../replies/quantity-text.ts';
+import { additiveVolumeText } from '../lines/amount-text.ts';
+import { line } from '../lines/line.ts';
+import type { Outcome, Turn } from '../outcome.ts';
+import { toDoseRequest } from '../to-requests.ts';
+
+/**
+ * The answer to a dose with what this wine has bound so far, and the amount by that, beside the rule of thumb: it is
+ * offered and never taken instead. Nothing where a share or an allowance was said, or the dose is made smaller by a limit.
+ */
+export function withLearned(reading: Reading, outcome: Outcome, { here, settings, manner }: Turn): Outcome {
+  const { vessel: name, binding_share, binding_allowance_percent } = reading.fields;
+  const vessel = name === undefined ? undefined : here.vessels.get(name);
+  if (vessel === undefined || vessel.landings.length + (vessel.bound_before?.cases ?? 0) < 2) return outcome;
+  const answer = outcome.answer as DoseAnswer | null;
+  const isStated = binding_share !== undefined || binding_allowance_percent !== undefined;
+  if (answer === null || isStated || !((answer.add_mg_L ?? 0) > 0)) return outcome;
+  const learned = learnedOf(vessel);
+  if (learned === undefined || learned.share > BOUNDS.binding_share.max || answer.capped || answer.choices)
+    return outcome;
+  const request = toDoseRequest(reading, settings);
+  const dose_mg_L = doseFor(answer.add_mg_L ?? 0, { binding_share: learned.share });
+  const amount =
+    request.additive === undefined || request.volume_L === undefined
+      ? undefined
+      : amountFor((dose_mg_L * request.volume_L) / 1000, request.additive);
+  const { mark, unit } = manner;
+  const offered = line('effect', 'learned-offer', {
+    share: numberText(100 * learned.share, 0, mark),
+    spread: numberText(Math.max(1, 100 * learned.spread), 0, mark),
+    count: String(learned.cases),
+    dose: concentrationText(dose_mg_L, mark),
+    unit,
+    amount:
+      amount?.mass_g !== undefined
+        ? massText(amount.mass_g, mark)
+        : amount?.additive_volume_mL !== undefined
+          ? additiveVolumeText(amount.additive_volume_mL, mark)
+          : 'none',
+  });
+  const last = outcome.lines.findLastIndex(({ room }) => ['first', 'condition', 'effect'].includes(room)) + 1;
+  return {
+    ...outcome,
+    answer: { ...answer, binding: learned },
+    lines: [...outcome.lines.slice(0, last), offered, ...outcome.lines.slice(last)],
+  };
+}
