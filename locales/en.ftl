@@ -199,15 +199,15 @@ dose-capped =
         }{ $after }, limit { $limit } { $unit } ({ rule-short }).
     }
 dose-at-limit =
-    { at }no sulfite now, { $standing ->
-        [over] over the limit already
-       *[at] at the limit
-    }: { $of ->
-        [free] free { $now }, limit { $limit } { $unit } free ({ rule-short }).
-       *[total] total { $least ->
-            [yes] at least{" "}
-           *[no] {""}
-        }{ $now }, limit { $limit } { $unit } ({ rule-short }).
+    { $least ->
+        [yes] { at }measure the total before any of this: it is at least { $now } now, and this would pass the limit { $limit } { $unit } ({ rule-short }).
+       *[no] { at }no sulfite now, { $standing ->
+            [over] over the limit already
+           *[at] at the limit
+        }: { $of ->
+            [free] free { $now }, limit { $limit } { $unit } free ({ rule-short }).
+           *[total] total { $now }, limit { $limit } { $unit } ({ rule-short }).
+        }
     }
 dose-over-already = It may not be sold so under that law{ law-decides }: ask whoever answers for this wine.
 law-assumed = Unknown, so at its strictest for the limit: { $list }.
@@ -884,6 +884,21 @@ help-people-4 = A keeper may do everything, a hand doses and logs, a guest looks
 help-people-5 = read along → I answer plain readings uncalled
 help-people-6 = at → which cellar we are in; at Blanca: another one
 help-people-7 = forget me → your name and number come off
+help-lab-1 = A titration is reckoned with its working; nothing is kept before you tap.
+help-lab-2 = AO 20 mL sample, 1.9 mL 0.01 N → free SO2; with T4 in front, kept by one tap
+help-lab-3 = T4 total AO 20 mL sample, 5.6 mL 0.01 N, blank 0.1 → total SO2
+help-lab-4 = ripper 25 mL sample, 1.2 mL 0.02 N, ascorbic 50 → iodine, without what ascorbic acid counts as
+help-lab-5 = range → how far the last dose may be off
+help-lab-6 = T4 1450 gal pH 3.58±0.03 free 21±2 → by your own ±
+help-lab-7 = table 0.5 0.8 1.5 pH 3.2-3.8 → free SO2 needed
+help-lab-8 = molecular T4 → by pK 1.81 and by OIV
+help-forecast-1 = A wine’s own readings tell more than any rule.
+help-forecast-2 = forecast T4 → the day free SO2 falls below what its pH needs
+help-forecast-3 = Three readings since the last addition make it; before that only barrels and bottles have published rates.
+help-forecast-4 = After two additions with readings before and after, a dose says what share this wine bound.
+help-forecast-5 = too much SO2 in T4 → what helps and what does not
+help-forecast-6 = blend T4 T7 → which share of T7 keeps to limit and target
+help-forecast-7 = blend T4 → which other vessels would do
 help-topic =
     { $topic ->
         [wine] wine

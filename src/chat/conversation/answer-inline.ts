@@ -40,6 +40,7 @@ const NOBODY: Omit<Here, 'settings' | 'message'> = {
   role: 'guest',
   nextEntry: 1,
   isZoneAsked: true,
+  chatLanguage: 'en',
   done: new Set(),
 };
 

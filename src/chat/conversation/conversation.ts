@@ -2,6 +2,7 @@ import type { CellarView } from '../../core/cellar/cellar-store.ts';
 import { codeIn } from './cellar/code.ts';
 import { isForUs } from './cellar/is-for-us.ts';
 import { join } from './cellar/join.ts';
+import { tellingChange } from './language.ts';
 import { namingCellar } from './cellar/naming-cellar.ts';
 import { permit } from './cellar/permit.ts';
 import { tellsOfDanger } from './cellar/tells-of-danger.ts';
@@ -33,7 +34,7 @@ export async function handle(
   const here = await arrive(withoutCall(message), view, defaults);
   if (!isForUs(here)) return { writes: [], replies: [] };
   const handled = await handleAddressed(here, view);
-  return namingCellar(handled, message);
+  return namingCellar(tellingChange(handled, here), message);
 }
 
 /** Whom a message calls by name is no part of what it says. */
@@ -51,7 +52,7 @@ async function handleAddressed(here: Here, view: CellarView): Promise<Handled> {
   if (here.role === undefined && !tellsOfDanger(message)) return shutOut(here, view);
   if (content.kind === 'unreadable') {
     const lines = [line('first', 'unreadable', { what: content.what })];
-    return { writes: [], replies: [{ language: message.language, lines, buttons: [] }] };
+    return { writes: [], replies: [{ language: here.settings.language, lines, buttons: [] }] };
   }
   const before = await view.entriesOfKeys(eventKey(message));
   // Delivered again: what it noted stands, and only what is asked is answered anew.

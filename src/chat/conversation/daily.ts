@@ -29,7 +29,7 @@ export function dailyDue(
 
 /** The writes that set the daily list of this chat, where it is not set yet, or when its hour has changed. */
 export async function scheduleDaily(
-  { message, settings }: Pick<Here, 'message' | 'settings'>,
+  { message, settings, chatLanguage }: Pick<Here, 'message' | 'settings' | 'chatLanguage'>,
   view: CellarView,
   { anew = false }: { readonly anew?: boolean } = {},
 ): Promise<Write[]> {
@@ -46,7 +46,7 @@ export async function scheduleDaily(
     { at: nextDaily(at, hours), set_at: at },
     {
       kind: 'daily',
-      language: settings.language,
+      language: chatLanguage,
       ...(about?.said_at !== undefined && { said_at: about.said_at }),
     },
   );

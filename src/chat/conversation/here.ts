@@ -1,9 +1,12 @@
 import type { CellarView, Person } from '../../core/cellar/cellar-store.ts';
 import type { Shelf } from '../../core/cellar/shelf.ts';
 import type { Vessel } from '../../core/cellar/vessel.ts';
+import type { Language } from '../reader/understood.ts';
 import {
+  chatLanguageKey,
   claimKey,
   dailyKey,
+  languageKey,
   memoryKey,
   notedKey,
   planKey,
@@ -16,6 +19,7 @@ import { readRoster, type Role, type Roster } from './cellar/roster.ts';
 import { FRESH_MEMORY, type Memory } from './memory.ts';
 import type { Claim, Plan } from './plan.ts';
 import type { IncomingMessage } from './ports.ts';
+import { languagesOf } from './language.ts';
 import { mergeSettings, type Settings } from './settings.ts';
 
 /** What is known of the vessels that a message is about. */
@@ -44,6 +48,10 @@ export interface Here extends CellarFacts {
   readonly message: IncomingMessage;
   readonly memory: Memory;
   readonly settings: Settings;
+  /** What the chat is told in; the person is answered in the language of the settings. */
+  readonly chatLanguage: Language;
+  /** The language before, where this message is the first that is clearly in another one. */
+  readonly changedFrom?: Language;
   /** The number of the person who writes, and whether they are new in this cellar. */
   readonly me: number;
   readonly isNewPerson: boolean;
@@ -77,7 +85,10 @@ export async function arrive(message: IncomingMessage, view: CellarView, default
     ZONE_ASKED_KEY,
     dailyKey(message.chat),
     notedKey(message),
+    languageKey(message),
+    chatLanguageKey(message.chat),
   ]);
+  const { language, ...languages } = languagesOf(message, all);
   const kept = all.get(memoryKey(message));
   const daily = all.get(dailyKey(message.chat));
   const noted = all.get(notedKey(message));
@@ -89,7 +100,8 @@ export async function arrive(message: IncomingMessage, view: CellarView, default
     ...NO_FACTS,
     message,
     memory: kept === undefined ? FRESH_MEMORY : (JSON.parse(kept) as Memory),
-    settings: { ...mergeSettings(defaults, set), language: message.language },
+    settings: { ...mergeSettings(defaults, set), language },
+    ...languages,
     me,
     roster,
     role: roleOf(roster, me, message),

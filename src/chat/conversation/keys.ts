@@ -24,6 +24,16 @@ export function memoryKey({ chat, person }: Pick<Who, 'chat' | 'person'>): strin
   return `memory ${JSON.stringify([chat, person])}`;
 }
 
+/** The language in which a person is answered in a chat. */
+export function languageKey({ chat, person }: Pick<Who, 'chat' | 'person'>): string {
+  return `language ${JSON.stringify([chat, person])}`;
+}
+
+/** The language that is set for a chat. */
+export function chatLanguageKey(chat: string): string {
+  return `chat language ${chat}`;
+}
+
 /** A reading that buttons refer to, by the chat they stand in: a person’s readings are counted in each anew. */
 export function readingKey(chat: string, ref: string): string {
   return `reading ${JSON.stringify([chat, ref])}`;

@@ -41,6 +41,8 @@ export interface Lexicon {
   readonly months: ReadonlyMap<string, number>;
   /** Days of the week by their names, Monday is 1. */
   readonly weekdays: ReadonlyMap<string, number>;
+  /** Languages by their names, in whatever language those are. */
+  readonly languages: ReadonlyMap<string, Language>;
 }
 
 const MENDABLE =
@@ -163,9 +165,19 @@ export function buildLexicon(lists: readonly Words[], { names = [], isTold = tru
     neverMended,
     own: ownOf(lists),
     months: numbered(lists.map(({ months }) => months)),
+    languages: LANGUAGES_BY_NAME,
     weekdays: numbered(lists.map(({ weekdays }) => weekdays)),
   };
 }
+
+/** `german`, `deutsch`, `de`, each also as another language calls it. */
+const LANGUAGES_BY_NAME: ReadonlyMap<string, Language> = new Map(
+  ALL_WORDS.flatMap(({ languages = {}, language: of }) =>
+    (Object.entries(languages) as [Language, readonly string[]][]).flatMap(([language, names]) =>
+      names.flatMap((name) => phrasesOf(name, of)).map((name): [string, Language] => [name, language]),
+    ),
+  ),
+);
 
 const built = new Map<string, Lexicon>();
 const ofText = new WeakMap<FoldedText, { readonly chat: Language; readonly lexicon: Lexicon }>();

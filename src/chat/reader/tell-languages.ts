@@ -12,6 +12,8 @@ export interface ToldLanguages {
   readonly others: readonly Language[];
   /** Whether any word told it. */
   readonly isTold: boolean;
+  /** Whether its words are clearly of that language and not of the chat's. */
+  readonly isClear: boolean;
 }
 
 /** Names that are the same everywhere tell no language, nor does what is written alike in all. */
@@ -43,6 +45,9 @@ const knownWords = (): ReadonlyMap<string, number> => (known ??= languagesOfWord
 
 /** From this length one word alone tells a second language; own threshold. */
 const CLEAR_LENGTH = 6;
+
+/** So many words that no other language has make it clear; own threshold. */
+const CLEAR_SCORE = 1.5;
 
 const WORD = /\p{L}+/gu;
 
@@ -79,5 +84,8 @@ export function tellLanguages(text: string, chat: Language): ToldLanguages {
     return only.size > 1 || [...only].some(({ length }) => length >= CLEAR_LENGTH);
   };
   const others = scores.filter(({ n }) => n !== best.n && isMissing(n)).map(({ language }) => language);
-  return { first: best.language, others, isTold: best.score > 0 };
+  const ownScore = own?.score ?? 0;
+  const isClear =
+    best.score >= (words.length === 1 ? 1 : CLEAR_SCORE) && ownScore <= best.score / 2 && best !== own;
+  return { first: best.language, others, isTold: best.score > 0, isClear };
 }

@@ -33,6 +33,8 @@ export interface Button {
   /** The label's key in `locales/`, and its values. */
   readonly label: string;
   readonly values: Readonly<Record<string, string>>;
+  /** The language of the label, where it is not the reply's own. */
+  readonly language?: Language;
 }
 
 /** A reply as data; `say` makes the text of it. */

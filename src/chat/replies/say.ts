@@ -63,7 +63,7 @@ export function makeSay(sources: LocaleSources): Say {
   return (reply) => {
     const sayLine = (line: Line): string => withCapital(format(chain(line.language ?? reply.language), line));
     const labelOf = (button: Reply['buttons'][number]): string =>
-      format(chain(reply.language), { key: button.label, values: button.values });
+      format(chain(button.language ?? reply.language), { key: button.label, values: button.values });
     const lines = reply.lines.map((line) => ({ line, text: sayLine(line) }));
     const hasMore = reply.buttons.some(({ label }) => label === 'button-more');
     return {

@@ -98,6 +98,7 @@ const HERE: Here = {
   role: 'keeper',
   nextEntry: 1,
   isZoneAsked: false,
+  chatLanguage: 'en',
   done: new Set(),
 };
 

@@ -174,6 +174,7 @@ export const de: Words = {
   },
   neverMended: ['freue', 'freies', 'frevel', 'freitag', 'metall', 'meter', 'tanke', 'tanker', 'trank', 'fast', 'fasst', 'fassen', 'fasse', 'sulfat', 'sulfid', 'metabisulfat', 'disulfat', 'gesagt', 'gesammelt', 'gespannt', 'gesund', 'meist', 'mist', 'rost', 'post', 'rat', 'rotte', 'zieh', 'viel', 'spiel', 'stiel', 'bie', 'weich', 'weis', 'weile', 'litern', 'leiter', 'letter', 'litze', 'bottich', 'stuck'],
   own: {
+    language: ['sprache', 'sprich', 'antworte auf', 'schreib auf', 'rede'],
     filler: ['bitte', 'danke', 'hallo', 'ok', 'okay', 'der', 'die', 'das', 'den', 'dem', 'ein', 'eine', 'einen', 'mein', 'meine', 'meinen', 'unser', 'unsere', 'mir', 'uns', 'kannst du', 'könntest du', 'kann ich', 'können wir', 'ich will', 'ich möchte', 'und', 'jetzt', 'mal', 'bot', 'doch', 'also', 'moin', 'guten morgen', 'servus'],
     request: ['kannst du', 'könntest du', 'kann ich', 'können wir'],
     courtesy: ['bitte', 'danke', 'hallo', 'ok', 'guten morgen', 'moin', 'servus'],
@@ -338,6 +339,7 @@ export const de: Words = {
     'count-5': ['fünf'],
     'count-6': ['sechs'],
   },
+  languages: { en: ['englisch'], es: ['spanisch'], fr: ['französisch'], it: ['italienisch'], de: ['deutsch', 'de'], pt: ['portugiesisch'] },
   months: [['januar', 'jänner', 'jan'], ['februar', 'feber', 'feb'], ['märz'], ['april', 'apr'], ['mai'], ['juni', 'jun'], ['juli', 'jul'], ['august', 'aug'], ['september', 'sept'], ['oktober', 'okt'], ['november', 'nov'], ['dezember', 'dez']],
   weekdays: [['montag'], ['dienstag'], ['mittwoch'], ['donnerstag'], ['freitag'], ['samstag', 'sonnabend'], ['sonntag']],
   danger: {

@@ -563,6 +563,7 @@ export const en: Words = {
       'inert gas', 'sulfonate', 'dithionite', 'bleach', 'chlorine', 'sodium sulfite', 'sodium sulphite', 'potassium sulfite', 'potassium sulphite', 'na2so3', 'k2so3', 'calcium sulfite', 'magnesium sulfite', 'e220', 'e221', 'e222', 'e225', 'e226', 'e227', 'e211', 'e202', 'e300', 'e330', 'e334', 'e336', 'k2co3', 'caco3', 'nahco3', 'nacl', 'k2so4', 'k2s2o8', 'na2s2o3', 'h2so4', 'magnesium metabisulfite', 'magnesium metabisulphite', 'calcium metabisulfite', 'calcium metabisulphite', 'ammonium metabisulfite', 'metabisulfide', 'metabisulphide', 'potassium metabisulfide', 'potassium metabisulphide', 'potassium caseinate', 'caseinate', 'potassium bitartrate', 'bitartrate', 'potassium tartrate', 'potassium chloride', 'diatomaceous earth', 'perlite', 'dry yeast', 'cellulose', ],
   },
   topics: {
+    forecast: ['forecast', 'forecasts', 'binding', 'blend', 'blends', 'too much', 'too much so2', 'loss', 'losses'],
     wine: ['wine', 'wines', 'dose', 'doses', 'dosing', 'reading', 'readings', 'addition', 'additions', 'sulfite', 'sulphite', 'so2', 'targets'],
     must: ['must', 'juice', 'grapes', 'fruit', 'crush', 'press', 'pressing', 'harvest', 'yield'],
     bottling: ['bottling', 'bottle', 'bottles', 'oxygen', 'malolactic', 'restart'],

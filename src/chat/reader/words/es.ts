@@ -173,6 +173,7 @@ export const es: Words = {
   },
   neverMended: ['libro', 'libra', 'libras', 'liebre', 'metano', 'metal', 'metro', 'tanto', 'tango', 'cubo', 'copa', 'sulfato', 'sulfuro', 'metabisulfato', 'barrio', 'barras', 'barra', 'barro', 'gato', 'toral', 'tonal', 'objetivos', 'moto', 'mixto', 'tinte', 'litera'],
   own: {
+    language: ['idioma', 'lengua', 'habla', 'contesta en', 'responde en', 'escribe en'],
     filler: ['por favor', 'gracias', 'muchas gracias', 'hola', 'ok', 'vale', 'el', 'la', 'los', 'las', 'un', 'una', 'mi', 'nuestro', 'nuestra', 'nuestros', 'me', 'nos', 'puedes', 'podrias', 'puedo', 'podemos', 'quiero', 'quiero ver', 'quisiera', 'ya', 'ahora', 'solo', 'y', 'buenas', 'buenos dias', 'le', 'lo', 'bot', 'pues', 'oye'],
     request: ['puedes', 'podrias', 'puedo', 'podemos'],
     courtesy: ['por favor', 'gracias', 'hola', 'ok', 'vale', 'buenos dias', 'buenas'],
@@ -337,6 +338,7 @@ export const es: Words = {
     'count-5': ['cinco'],
     'count-6': ['seis'],
   },
+  languages: { en: ['ingles'], es: ['espanol', 'castellano', 'es'], fr: ['frances'], it: ['italiano'], de: ['aleman'], pt: ['portugues'] },
   months: [['enero', 'ene'], ['febrero', 'feb'], ['marzo'], ['abril', 'abr'], ['mayo'], ['junio', 'jun'], ['julio', 'jul'], ['agosto'], ['septiembre', 'setiembre', 'sept'], ['octubre', 'oct'], ['noviembre', 'nov'], ['diciembre', 'dic']],
   weekdays: [['lunes'], ['martes'], ['miercoles'], ['jueves'], ['viernes'], ['sabado'], ['domingo']],
   danger: {

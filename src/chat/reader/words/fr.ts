@@ -173,6 +173,7 @@ export const fr: Words = {
   },
   neverMended: ['livre', 'livres', 'libres', 'metal', 'metro', 'metre', 'metres', 'cave', 'caves', 'cure', 'cube', 'sulfate', 'sulfure', 'metabisulfate', 'barre', 'barres', 'libraire', 'boule', 'futur', 'trop', 'toral', 'mouton', 'mousse', 'moto', 'cibler', 'sourire', 'site'],
   own: {
+    language: ['langue', 'parle', 'reponds en', 'ecris en'],
     filler: ["s'il te plait", "s'il vous plait", 'stp', 'svp', 'merci', 'bonjour', 'salut', 'ok', 'le', 'la', 'les', "l'", 'un', 'une', 'des', 'mon', 'ma', 'notre', 'nos', 'moi', 'nous', 'peux tu', 'pouvez vous', 'tu peux', 'je peux', 'je veux', 'je veux voir', 'je voudrais', 'on veut', 'et', 'maintenant', 'bot', 'alors', 'donc', "d'accord"],
     request: ['peux tu', 'pouvez vous', 'tu peux', 'je peux'],
     courtesy: ['merci', 'bonjour', 'salut', 'ok', 'stp', 'svp'],
@@ -337,6 +338,7 @@ export const fr: Words = {
     'count-5': ['cinq'],
     'count-6': ['six'],
   },
+  languages: { en: ['anglais'], es: ['espagnol'], fr: ['francais', 'fr'], it: ['italien'], de: ['allemand'], pt: ['portugais'] },
   months: [['janvier', 'janv'], ['fevrier', 'fev', 'fevr'], ['mars'], ['avril', 'avr'], ['mai'], ['juin'], ['juillet', 'juil'], ['aout'], ['septembre', 'sept'], ['octobre', 'oct'], ['novembre', 'nov'], ['decembre', 'dec']],
   weekdays: [['lundi'], ['mardi'], ['mercredi'], ['jeudi'], ['vendredi'], ['samedi'], ['dimanche']],
   danger: {

@@ -173,6 +173,7 @@ export const it: Words = {
   },
   neverMended: ['libro', 'libri', 'libra', 'metallo', 'metro', 'metri', 'meta', 'tasca', 'tasche', 'fiasca', 'vasta', 'solfato', 'solfuro', 'metabisolfato', 'barca', 'barche', 'botta', 'botto', 'bolle', 'notte', 'totano', 'fonale', 'tonale', 'mosso', 'mostro', 'mosti', 'posto', 'costo', 'dolcetto', 'litio', 'lista', 'rossetto'],
   own: {
+    language: ['lingua', 'parla', 'rispondi in', 'scrivi in'],
     filler: ['per favore', 'grazie', 'ciao', 'ok', 'il', 'lo', 'la', 'i', 'gli', 'le', "l'", 'un', 'una', 'mio', 'mia', 'nostro', 'nostra', 'mi', 'ci', 'puoi', 'potresti', 'posso', 'possiamo', 'voglio', 'voglio vedere', 'vorrei', 'e', 'ora', 'adesso', 'bot', 'allora', 'per piacere', 'buongiorno'],
     request: ['puoi', 'potresti', 'posso', 'possiamo'],
     courtesy: ['grazie', 'ciao', 'ok', 'buongiorno', 'per favore'],
@@ -337,6 +338,7 @@ export const it: Words = {
     'count-5': ['cinque'],
     'count-6': ['sei'],
   },
+  languages: { en: ['inglese'], es: ['spagnolo'], fr: ['francese'], it: ['italiano', 'it'], de: ['tedesco'], pt: ['portoghese'] },
   months: [['gennaio', 'gen'], ['febbraio', 'feb'], ['marzo'], ['aprile', 'apr'], ['maggio', 'mag'], ['giugno', 'giu'], ['luglio', 'lug'], ['agosto'], ['settembre', 'sett'], ['ottobre', 'ott'], ['novembre', 'nov'], ['dicembre', 'dic']],
   weekdays: [['lunedi'], ['martedi'], ['mercoledi'], ['giovedi'], ['venerdi'], ['sabato'], ['domenica']],
   danger: {

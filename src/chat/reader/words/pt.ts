@@ -173,6 +173,7 @@ export const pt: Words = {
   },
   neverMended: ['livro', 'livros', 'libra', 'metal', 'metro', 'metros', 'meta', 'curva', 'cubo', 'cura', 'tangue', 'sulfato', 'sulfureto', 'metabissulfato', 'barra', 'barras', 'barro', 'canto', 'banco', 'branca', 'tonal', 'pinto', 'lindo', 'doze', 'mosca', 'litoral', 'alto', 'salvo', 'calvo'],
   own: {
+    language: ['lingua', 'idioma', 'fala', 'responde em', 'escreve em'],
     filler: ['por favor', 'obrigado', 'obrigada', 'ola', 'ok', 'o', 'a', 'os', 'as', 'um', 'uma', 'meu', 'minha', 'nosso', 'nossa', 'me', 'nos', 'podes', 'pode', 'podias', 'posso', 'podemos', 'quero', 'quero ver', 'queria', 'e', 'agora', 'bot', 'entao', 'oi', 'bom dia', 'sff'],
     request: ['podes', 'pode', 'podias', 'posso', 'podemos'],
     courtesy: ['por favor', 'obrigado', 'obrigada', 'ola', 'ok', 'bom dia', 'oi'],
@@ -337,6 +338,7 @@ export const pt: Words = {
     'count-5': ['cinco'],
     'count-6': ['seis'],
   },
+  languages: { en: ['ingles'], es: ['espanhol'], fr: ['frances'], it: ['italiano'], de: ['alemao'], pt: ['portugues', 'pt'] },
   months: [['janeiro', 'jan'], ['fevereiro', 'fev'], ['marco'], ['abril', 'abr'], ['maio'], ['junho', 'jun'], ['julho', 'jul'], ['agosto'], ['setembro'], ['outubro'], ['novembro', 'nov'], ['dezembro', 'dez']],
   weekdays: [['segunda'], ['terca'], ['quarta'], ['quinta'], ['sexta'], ['sabado'], ['domingo']],
   danger: {

@@ -91,7 +91,7 @@ export type DangerId =
 /** A topic of help: the sentences `help-<topic>-…` are its screen. */
 export type HelpTopic =
   | 'wine' | 'must' | 'bottling' | 'law' | 'round' | 'stock' | 'solutions' | 'log' | 'vessels' | 'reminders'
-  | 'settings' | 'pictures' | 'files' | 'people' | 'lab'; // prettier-ignore
+  | 'settings' | 'pictures' | 'files' | 'people' | 'lab' | 'forecast'; // prettier-ignore
 
 /**
  * All that people write in one language: data only. Entries are lower case without accents; an entry of

@@ -22,12 +22,14 @@ export function showSettings(here: Here): Handled {
     'setting-allowance',
     'setting-basis',
     'setting-law',
+    'setting-yield',
     'setting-zone',
     'setting-daily',
     'setting-quiet',
     'setting-ph-days',
     'setting-check-days',
     'setting-short-replies',
+    'setting-language',
   ];
   const values = valuesOf(settings, here);
   return replying(here, {
@@ -42,15 +44,14 @@ export async function setSetting(setting: Setting, here: Here, view: CellarView)
   const kept = await view.kept(SETTINGS_KEY);
   const before = kept === undefined ? {} : (JSON.parse(kept) as CellarSettings);
   const targets = { ...before.targets, ...changed.targets };
-  const { allowance_percent: _allowance, ...others } = before;
-  const isNoAllowance = setting.of === 'allowance' && setting.percent === 0;
+  const taken = takenAway(setting);
   const after = {
-    ...(isNoAllowance ? others : { ...before, ...changed }),
+    ...without({ ...before, ...changed }, taken),
     ...(Object.keys(targets).length > 0 && { targets }),
   };
   const text = JSON.stringify(after);
   const settings: Settings = { ...mergeSettings(here.settings, text), language: here.settings.language };
-  const next: Here = { ...here, settings: isNoAllowance ? withoutAllowance(settings) : settings };
+  const next: Here = { ...here, settings: without(settings, taken) };
   const { writes, ...said } = replying(here, { lines: [settingLine(setting.of, next)] });
   const isTimed = setting.of === 'zone' || setting.of === 'daily' || setting.of === 'quiet';
   const daily = isTimed ? await scheduleDaily(next, view, { anew: true }) : [];
@@ -63,8 +64,14 @@ export function settingWrong(of: Setting['of'], about: string, here: Here): Hand
   return replying(here, { lines: [line('first', 'setting-wrong', { of, text: about })] });
 }
 
-function withoutAllowance({ allowance_percent: _allowance, ...settings }: Settings): Settings {
-  return settings;
+/** What somebody sets to nothing. */
+function takenAway(setting: Setting): 'allowance_percent' | 'yield_L_per_100_kg' | undefined {
+  if (setting.of === 'allowance' && setting.percent === 0) return 'allowance_percent';
+  return setting.of === 'yield' && setting.yield_L_per_100_kg === 'off' ? 'yield_L_per_100_kg' : undefined;
+}
+
+function without<S extends CellarSettings>(settings: S, name: keyof CellarSettings | undefined): S {
+  return Object.fromEntries(Object.entries(settings).filter(([one]) => one !== name)) as S;
 }
 
 function changeOf(setting: Setting, settings: Settings): CellarSettings | undefined {
@@ -87,6 +94,10 @@ function changeOf(setting: Setting, settings: Settings): CellarSettings | undefi
       return { allowance_percent: setting.percent };
     case 'basis':
       return { basis: setting.basis };
+    case 'yield':
+      return setting.yield_L_per_100_kg === 'off'
+        ? {}
+        : { yield_L_per_100_kg: setting.yield_L_per_100_kg };
     case 'law':
       return { region: setting.region };
     case 'short-replies':
@@ -125,7 +136,8 @@ function minuteText(minute: number): string {
 }
 
 function valuesOf(settings: Settings, { memory }: Pick<Here, 'memory'>): Record<string, string> {
-  const said = (value: number): string => numberText(value, 2, memory.decimalMark ?? '.');
+  const mark = memory.decimalMark ?? '.';
+  const said = (value: number): string => numberText(value, 2, mark);
   const { targets, quiet, daily_minute: daily, usualStrength } = settings;
   return {
     units: settings.units,
@@ -137,6 +149,8 @@ function valuesOf(settings: Settings, { memory }: Pick<Here, 'memory'>): Record<
     percent: settings.allowance_percent === undefined ? 'none' : said(settings.allowance_percent),
     basis: settings.basis,
     region: settings.region,
+    yield:
+      settings.yield_L_per_100_kg === undefined ? 'none' : numberText(settings.yield_L_per_100_kg, 1, mark),
     zone: settings.zone ?? 'none',
     daily: daily === 'off' ? 'off' : minuteText(daily),
     from: minuteText(quiet.from_minute),

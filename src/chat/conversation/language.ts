@@ -1,0 +1,118 @@
+import type { CellarView, Write } from '../../core/cellar/cellar-store.ts';
+import { foldText } from '../reader/fold-text.ts';
+import { tellLanguages } from '../reader/tell-languages.ts';
+import type { Language } from '../reader/understood.ts';
+import { SPOKEN } from '../replies/spoken.ts';
+import type { Here } from './here.ts';
+import { chatLanguageKey, dailyKey, languageKey } from './keys.ts';
+import { line } from './lines/line.ts';
+import type { Handled, IncomingMessage } from './ports.ts';
+import { replying } from './replying.ts';
+
+/** In which language somebody is answered in a chat; plain JSON. */
+interface KeptLanguage {
+  readonly language: Language;
+  /** They want it so, whatever they write in. */
+  readonly stays?: true;
+}
+
+/** The languages of a message: what the person is answered in, and what the chat is told in. */
+export interface Languages {
+  readonly language: Language;
+  readonly chatLanguage: Language;
+  /** The language before, where the message is the first that is clearly in another one. */
+  readonly changedFrom?: Language;
+}
+
+const isGroup = ({ addressed = 'direct' }: IncomingMessage): boolean => addressed !== 'direct';
+
+/** The text of a message, if it has one that tells a language. */
+const textOf = ({ content }: IncomingMessage): string | undefined =>
+  content.kind === 'text' || content.kind === 'edited' ? content.text : undefined;
+
+/** The language that a text is clearly in; undefined where its words leave that open. */
+function clearLanguage(text: string, chat: Language): Language | undefined {
+  const told = tellLanguages(foldText(text).text, chat);
+  return told.isClear && told.first !== chat && SPOKEN.includes(told.first) ? told.first : undefined;
+}
+
+/**
+ * In which language a message is answered: what is kept of the person, else of the chat, else what the platform tells;
+ * then the message itself, where it is clearly in another one.
+ */
+export function languagesOf(message: IncomingMessage, kept: ReadonlyMap<string, string>): Languages {
+  const ofPerson = kept.get(languageKey(message));
+  const ofChat = kept.get(chatLanguageKey(message.chat)) as Language | undefined;
+  const own = ofPerson === undefined ? undefined : (JSON.parse(ofPerson) as KeptLanguage);
+  const before = own?.language ?? ofChat ?? message.language;
+  const text = textOf(message);
+  const next = own?.stays || text === undefined ? undefined : clearLanguage(text, before);
+  const language = next ?? before;
+  return {
+    language,
+    chatLanguage: isGroup(message) ? (ofChat ?? message.language) : language,
+    ...(next !== undefined && { changedFrom: before }),
+  };
+}
+
+const keepOf = (message: IncomingMessage, kept: KeptLanguage): Write => ({
+  kind: 'keep',
+  key: languageKey(message),
+  text: JSON.stringify(kept),
+});
+
+/** What the key of the button that stays with a language begins with. */
+const STAY = 'stay:';
+
+/** The language that a button stays with; undefined for another button. */
+export function stayingWith(key: string): Language | undefined {
+  return key.startsWith(STAY) ? (key.slice(STAY.length) as Language) : undefined;
+}
+
+/** A reply with the line, once, that it is in another language from now on, and the button to stay with the one before. */
+export function tellingChange(handled: Handled, { message, settings, changedFrom }: Here): Handled {
+  const [first, ...rest] = handled.replies;
+  if (changedFrom === undefined || first === undefined) return handled;
+  const { language } = settings;
+  const writes = [...handled.writes, keepOf(message, { language })];
+  const isDanger = first.lines.some(({ key }) => key.startsWith('emergency'));
+  if (isDanger || !SPOKEN.includes(changedFrom)) return { ...handled, writes };
+  const button = {
+    key: `${STAY}${changedFrom}`,
+    mark: '*',
+    label: 'button-stay-language',
+    values: {},
+    language: changedFrom,
+  };
+  const reply = {
+    ...first,
+    lines: [...first.lines, line('assumed', 'language-changed')],
+    buttons: [...first.buttons, button],
+  };
+  return { ...handled, writes, replies: [reply, ...rest] };
+}
+
+/** Somebody stays with a language, whatever they write in. */
+export function stay(language: Language, here: Here): Handled {
+  const next = { ...here, settings: { ...here.settings, language } };
+  const handled = replying(next, { lines: [line('first', 'language-set')], keepsButtons: true });
+  return { ...handled, writes: [...handled.writes, keepOf(here.message, { language, stays: true })] };
+}
+
+/** The chat is told in a language from now on; in a private chat that is the person's too. */
+export async function setLanguage(language: Language, here: Here, view: CellarView): Promise<Handled> {
+  const { message } = here;
+  const next = { ...here, settings: { ...here.settings, language } };
+  const handled = replying(next, { lines: [line('first', 'language-set')] });
+  const daily = await view.kept(dailyKey(message.chat));
+  const due = daily === undefined ? undefined : await view.due(daily);
+  const writes: Write[] = [
+    { kind: 'keep', key: chatLanguageKey(message.chat), text: language },
+    { kind: 'drop', key: languageKey(message) },
+  ];
+  if (due) {
+    const about = JSON.stringify({ ...(JSON.parse(due.about) as object), language });
+    writes.push({ kind: 'due', due: { ...due, about } });
+  }
+  return { ...handled, writes: [...handled.writes, ...writes] };
+}
