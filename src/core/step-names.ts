@@ -25,6 +25,7 @@ export const STEP_KINDS = {
   'dose-with-share': { symbol: 'D', formula: 'addition ÷ (1 − share that binds)' },
   'volume-in-litres': { symbol: 'V', formula: 'volume × litres in one unit of it' },
   'room-to-limit': { symbol: 'D', formula: 'limit − what is kept below it − SO2 now' },
+  'must-of-fruit': { symbol: 'V', formula: 'fruit × litres from 100 kg ÷ 100 kg' },
   'so2-mass': { symbol: 'S', formula: 'SO2 that goes in × volume ÷ 1000' },
   'so2-mass-each': { symbol: 'S', formula: 'SO2 that goes in × volume of one vessel ÷ 1000' },
   'all-vessels': { symbol: 'm', formula: 'amount for one vessel × number of vessels' },

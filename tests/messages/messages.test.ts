@@ -9,6 +9,7 @@ for (const file of [
   'en-words.jsonl',
   'en-marks.jsonl',
   'en-solutions.jsonl',
+  'en-must.jsonl',
   'refused.en.jsonl',
   'emergency.jsonl',
   'en-commands.jsonl',

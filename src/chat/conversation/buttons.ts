@@ -1,6 +1,7 @@
 import { ADDITIVES } from '../../core/additives/additives.ts';
 import type { DoseChoice } from '../../core/dose/answer.ts';
-import type { AskedField, Fields } from '../reader/understood.ts';
+import { mustFigures } from '../../core/dose/must-ranges.ts';
+import type { AskedField, Fields, Reading } from '../reader/understood.ts';
 import { numberText } from '../replies/number-text.ts';
 import { volumeText } from '../replies/volume-text.ts';
 import type { Button } from '../replies/reply.ts';
@@ -11,7 +12,7 @@ import { letterAt } from './waiting.ts';
 /** What a button does to a reading; its key is `does:ref`, of a choice `does:ref:which`. */
 export type Does =
   | 'w' | 's' | 't' | 'm' | 'nf' | 'red' | 'white' | 'c' | 'l'
-  | 'k' | 'f' | 'fy' | 'a' | 'y' | 'o' | 'n' | 'i' | 'gb' | 'ga' | 'gd'; // prettier-ignore
+  | 'p' | 'k' | 'f' | 'fy' | 'a' | 'y' | 'o' | 'n' | 'i' | 'gb' | 'ga' | 'gd'; // prettier-ignore
 
 /** What a button does to an entry of the log; its key is `does:entry`. */
 export type DoesToEntry = 'u' | 'd' | 'r';
@@ -120,6 +121,18 @@ export function choiceButtons(
   return [...ways, ...others].map((button, at) => ({ ...button, mark: String(at + 1) }));
 }
 
+/** A button for each figure that was published for must of fruit in the state that was told; none where none was. */
+export function publishedButtons(ref: string, { marks, fields }: Reading, manner: Manner): Button[] {
+  const { fruitState } = marks;
+  if (fields.stage !== 'must' || fruitState === undefined) return [];
+  return mustFigures(fruitState, fields.style).map((add_mg_L, place) => ({
+    key: `p:${ref}:${place}`,
+    mark: String(place + 1),
+    label: 'button-published' as const,
+    values: { add: perLitre(add_mg_L, manner) },
+  }));
+}
+
 /** A button for each value of the field that is asked, marked with its letter. */
 export function letterButtons(
   ref: string,
@@ -160,7 +173,7 @@ export interface Pressed {
 /** Takes a button's key apart; undefined for one that is of no reading, or that we never made. */
 export function parseKey(key: string): Pressed | undefined {
   const match =
-    /^(k|w|s|t|m|nf|red|white|c|l|fy|f|a|y|o|n|i|gb|ga|gd):(\d{1,9}\.\d{1,9})(?::([a-z]|\d))?$/.exec(key);
+    /^(p|k|w|s|t|m|nf|red|white|c|l|fy|f|a|y|o|n|i|gb|ga|gd):(\d{1,9}\.\d{1,9})(?::([a-z]|\d))?$/.exec(key);
   if (!match) return undefined;
   return { does: match[1] as Does, ref: match[2] ?? '', which: match[3] ?? '' };
 }

@@ -41,7 +41,8 @@ export function belongs(waiting: Reading, next: Reading): boolean {
  * no other vessel. Otherwise it starts a new one.
  */
 function completes(waiting: Reading, next: Reading): boolean {
-  return Object.keys(next.fields).length > 0 && belongs(waiting, next);
+  const isYield = next.marks.yield_L_per_100_kg !== undefined && waiting.marks.fruitByWeight === true;
+  return (Object.keys(next.fields).length > 0 || isYield) && belongs(waiting, next);
 }
 
 /** The waiting reading with the fields of its answer; what is assumed and what is still missing is worked out anew. */

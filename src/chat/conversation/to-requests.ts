@@ -8,6 +8,7 @@ import type {
   WineFacts,
 } from '../../core/dose/request.ts';
 import { litresTo } from '../../core/units/volume.ts';
+import { fruitOf } from '../reader/finish-reading.ts';
 import type { AskedField, Fields, Reading } from '../reader/understood.ts';
 import type { Settings } from './settings.ts';
 
@@ -64,6 +65,12 @@ function volumeOf({
 }
 
 /** What is known of the wine; the law of the market is the cellar's. */
+/** The fruit of which the volume is the must, so that the working begins with it. */
+function fruitIn({ fields, assumed, marks }: Reading): Pick<DoseRequest, 'fruit'> {
+  const fruit = fields.volume_L === undefined ? fruitOf(marks, assumed) : undefined;
+  return fruit === undefined ? {} : { fruit };
+}
+
 function wineOf({ fields, totalOf }: Reading, { region }: Pick<Settings, 'region'>): WineFacts {
   return {
     region,
@@ -120,6 +127,7 @@ export function toDoseRequest(
   return {
     ...wineOf(reading, settings),
     ...volumeOf(reading),
+    ...fruitIn(reading),
     ...(count !== undefined && { vessels: count }),
     ...optionalAdditive(reading),
     ...(target !== undefined && { target }),

@@ -1,3 +1,4 @@
+import { mustOf, type Fruit } from '../../core/dose/fruit.ts';
 import { STAGES_WITHOUT_TARGET } from '../../core/wine.ts';
 import type { Target } from '../../core/wine.ts';
 import type { AskedField, Assumed, Draft, Fields, Reading, ReaderSettings } from './understood.ts';
@@ -45,8 +46,26 @@ function askAdditive({ marks }: Draft, fields: Fields, asks: Set<AskedField>): v
   if (additive?.endsWith('-solution') && fields.strength_percent === undefined) asks.add('strength_percent');
 }
 
-/** Litres that may be assumed: barrels without a size, by count or by number. */
-function assumedVolume({ intent, marks }: Draft, fields: Fields): number | undefined {
+/** The fruit of a must told by weight, where its yield is stated or set. */
+export function fruitOf(
+  { fruit_kg, yield_L_per_100_kg: stated }: Pick<Reading['marks'], 'fruit_kg' | 'yield_L_per_100_kg'>,
+  { yield_L_per_100_kg: usual }: Pick<ReaderSettings, 'yield_L_per_100_kg'>,
+): Fruit | undefined {
+  const yield_L_per_100_kg = stated ?? usual;
+  return fruit_kg === undefined || yield_L_per_100_kg === undefined
+    ? undefined
+    : { fruit_kg, yield_L_per_100_kg };
+}
+
+/** Litres that may be assumed: the must of fruit by its yield, barrels without a size, by count or by number. */
+function assumedVolume(
+  { intent, marks }: Draft,
+  fields: Fields,
+  settings: Pick<ReaderSettings, 'yield_L_per_100_kg'>,
+): number | undefined {
+  const fruit = fruitOf(marks, settings);
+  if (fruit && fields.volume_L === undefined && (intent === 'dose' || intent === 'effect'))
+    return mustOf(fruit);
   if (fields.volume_L !== undefined || marks.fruitByWeight || marks.casksWithoutSize || marks.eachOrTotal)
     return undefined;
   // To rinse a barrel does not take a barrel full.
@@ -66,9 +85,16 @@ function work(
 ): { assumed: Assumed; asks: Set<AskedField> } {
   const { intent, marks } = draft;
   const asks = new Set<AskedField>();
-  const volume_L = assumedVolume(draft, fields);
+  const volume_L = assumedVolume(draft, fields, settings);
+  const { yield_L_per_100_kg: usualYield } = settings;
+  const isByUsualYield =
+    volume_L !== undefined && marks.fruit_kg !== undefined && marks.yield_L_per_100_kg === undefined;
   const gallon = marks.gallonRead ? { gallon: settings.gallon } : {};
-  const base: Assumed = { ...(volume_L === undefined ? {} : { volume_L }), ...gallon };
+  const base: Assumed = {
+    ...(volume_L === undefined ? {} : { volume_L }),
+    ...(isByUsualYield && usualYield !== undefined ? { yield_L_per_100_kg: usualYield } : {}),
+    ...gallon,
+  };
   const unknownVolume = fields.volume_L === undefined && volume_L === undefined;
   const nameless = fields.additive === undefined && !marks.unnamedAdditive && !marks.campden;
   // Millilitres are of no powder: which solution it was has to be asked.

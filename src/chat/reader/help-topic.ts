@@ -16,16 +16,18 @@ const isHelpIn =
   ({ text }: Piece): boolean =>
     phrases.get(text)?.tags.includes('cue:help') === true;
 
-/** What may stand between `help` and its topic, or around both. */
-const SMALL: ReadonlySet<string> = new Set(['filler', 'for', 'of', 'on', 'with', 'and', 'article', 'show']);
-const isSmall = ({ ids }: Piece): boolean => ids.some((id) => SMALL.has(id));
+/** Small words, which may stand between `help` and its topic, or around both. */
+const SMALL: ReadonlySet<string> = new Set(
+  READ_IN_FULL.flatMap(({ own = {} }) =>
+    (['filler', 'for', 'of', 'on', 'with', 'and', 'article', 'show'] as const).flatMap((id) => own[id] ?? []),
+  ),
+);
 
 /** The topic of `help law`, `/help law`, `help with the law?`: of nothing that says more than that. */
 export function helpTopicOf({ pieces, lexicon }: Board): HelpTopic | undefined {
   const isHelp = isHelpIn(lexicon);
   const said = pieces.filter(({ kind }) => kind !== 'mark' && kind !== 'break');
   if (said.length > 8 || !said.some(isHelp)) return undefined;
-  const rest = said.filter((piece) => !isHelp(piece));
-  const words = (some: readonly Piece[]): string => some.map(({ text }) => text).join(' ');
-  return TOPICS.get(words(rest)) ?? TOPICS.get(words(rest.filter((piece) => !isSmall(piece))));
+  const words = said.filter((piece) => !isHelp(piece)).flatMap(({ text }) => text.split(' '));
+  return TOPICS.get(words.join(' ')) ?? TOPICS.get(words.filter((word) => !SMALL.has(word)).join(' '));
 }

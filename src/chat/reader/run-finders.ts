@@ -9,6 +9,7 @@ import { findKind } from './finders/kind.ts';
 import { findLabelled } from './finders/labels.ts';
 import { findLetterPair } from './finders/letter-pair.ts';
 import { findMass } from './finders/mass.ts';
+import { findMixedSample } from './finders/mixed-sample.ts';
 import { findNumberWord } from './finders/number-word.ts';
 import { findOtherAdditive } from './finders/other-additive.ts';
 import { findOtherQuantities } from './finders/other-quantities.ts';
@@ -37,6 +38,7 @@ import { findWhen } from './finders/when.ts';
 
 /** From the most certain to the least: what one has claimed, no later one reads. */
 const FINDERS: readonly Finder[] = [
+  findMixedSample,
   findStage,
   findPastTense,
   findChemicalLot,

@@ -154,6 +154,8 @@ export interface Marks {
   wick?: true;
   /** The first line of the round said that all this was added. */
   pastLine?: true;
+  /** One sample was mixed from several vessels: the person’s own words. */
+  mixedSample?: string;
   /** `each` stood beside the volume of several vessels. */
   statedEach?: true;
   /** `total`, `in all` stood beside it. */

@@ -15,11 +15,13 @@ function fieldsFor(
   value: number,
   unit: string | undefined,
   settings: ReaderSettings,
+  isOfFruit = false,
 ): Fields | undefined {
   const asked = (allowed: readonly (string | undefined)[]): boolean => allowed.includes(unit);
   switch (field) {
     case 'volume_L':
-      if (settings.volumeUnit === 'barrel') return undefined;
+      // A yield is asked for too: a bare number may be either.
+      if (settings.volumeUnit === 'barrel' || isOfFruit) return undefined;
       return asked([undefined]) ? { volume_L: litresFrom(value, settings.volumeUnit) } : undefined;
     case 'ph':
       return asked([undefined, 'ph']) ? { ph: value } : undefined;
@@ -64,7 +66,10 @@ export function readWaiting(
       : readNumeral(raw, { point: settings.language !== 'en', comma: settings.language === 'en' });
   const value = match[1] === '-' ? -numeral.value : numeral.value;
   const isHuge = !(Math.abs(value) < HUGE);
-  const fields = numeral.unsure || isHuge ? undefined : fieldsFor(waiting.field, value, match[3], settings);
+  const fields =
+    numeral.unsure || isHuge
+      ? undefined
+      : fieldsFor(waiting.field, value, match[3], settings, waiting.reading.marks.fruitByWeight === true);
   const problems = isHuge
     ? [{ code: 'value-out-of-range' as const, about: raw.slice(0, 20) }]
     : numeral.unsure

@@ -16,4 +16,6 @@ export const HELP_KEYS: Readonly<Record<string, readonly SentenceKey[]>> = {
   pictures: ['help-pictures-1', 'help-pictures-2'],
   files: ['help-files-1', 'help-files-2', 'help-files-3', 'help-files-4'],
   people: ['help-people-1', 'help-people-2', 'help-people-3', 'help-people-4', 'help-people-5', 'help-people-6', 'help-people-7'],
+  lab: ['help-lab-1', 'help-lab-2', 'help-lab-3', 'help-lab-4', 'help-lab-5', 'help-lab-6', 'help-lab-7', 'help-lab-8'],
+  forecast: ['help-forecast-1', 'help-forecast-2', 'help-forecast-3', 'help-forecast-4', 'help-forecast-5', 'help-forecast-6', 'help-forecast-7'],
 };

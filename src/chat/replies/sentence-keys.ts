@@ -529,6 +529,7 @@ export interface SentenceValues {
   measure: 'vessel';
   'measure-tomorrow': never;
   measured: 'additive' | 'amount' | 'count' | 'size' | 'strength' | 'unit';
+  'mixed-sample': 'count';
   'molecular-base': 'alcohol' | 'basis' | 'known' | 'molecular' | 'needed' | 'pK' | 'target';
   'molecular-head': 'day' | 'free' | 'ph' | 'unit' | 'vessel';
   'molecular-meaning': 'basis' | 'dose' | 'other' | 'times' | 'unit';
@@ -761,6 +762,7 @@ export interface SentenceValues {
   'round-limited': 'limited';
   'round-low': 'list';
   'round-missing': 'field' | 'vessel';
+  'round-mixed': 'list';
   'round-more': 'count';
   'round-name': 'name';
   'round-not-noted': 'list';

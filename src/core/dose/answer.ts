@@ -2,6 +2,7 @@ import type { AdditiveId } from '../additives/additive-id.ts';
 import type { Limit } from '../limits/limit.ts';
 import type { Basis, Target } from '../wine.ts';
 import type { Step } from '../working.ts';
+import type { AfterMust } from './after-must.ts';
 import type { SolutionUse } from './solution-recipes.ts';
 
 /** What a scale or a cylinder shows. */
@@ -54,7 +55,8 @@ export type WarningCode =
   | 'rounding-coarse'
   | 'no-dose-at-this-stage'
   | 'does-not-stop-fermentation'
-  | 'already-dosed';
+  | 'already-dosed'
+  | 'must-may-hinder-malolactic';
 
 /** A warning with the figures it is about, by their JSON names, in full precision. */
 export interface Warning {
@@ -138,6 +140,8 @@ export interface DoseAnswer extends Partial<MeasuredAmount> {
   readonly limits?: readonly Limit[];
   /** Present where the dose passes a limit that was read. */
   readonly capped?: CappedDose;
+  /** Of must: what follows from the addition. */
+  readonly after_must?: AfterMust;
   readonly warnings: readonly Warning[];
   readonly choices?: readonly DoseChoice[];
   readonly steps: readonly Step[];

@@ -3,6 +3,7 @@ import type { Dissociation } from '../chemistry/dissociation.ts';
 import { SHOWN_UNITS, shown } from '../units/shown.ts';
 import { minus, over, times, type Step, type Term } from '../working.ts';
 import type { Aim } from './aim.ts';
+import { mustLine } from './fruit.ts';
 import { line, printAlike, withEnoughDigits, type Line } from './line.ts';
 import type { DoseRequest } from './request.ts';
 import { toStep, type Rounded } from './rounding.ts';
@@ -95,7 +96,10 @@ function amountLines(work: DoseWork, dose: Term, made: Made, digits: number): vo
   const { request, content } = work;
   if (content === undefined || request.volume_L === undefined) return;
   const count = request.vessels ?? 1;
-  const { volume: all, lines } = volumeInLitres(request.volume_L, request.volume_display, digits);
+  const ofFruit = request.fruit && mustLine(request.fruit, digits);
+  const { volume: all, lines } = ofFruit
+    ? { volume: ofFruit.result, lines: [ofFruit] }
+    : volumeInLitres(request.volume_L, request.volume_display, digits);
   const volume = count > 1 ? over(all, number(count, digits)) : all;
   const SO2_g = over(times(dose, volume), MG_PER_G);
   const SO2 = line(count > 1 ? 'so2-mass-each' : 'so2-mass', SO2_g, 'g', digits);

@@ -4,6 +4,7 @@ import { pKOf, type Dissociation } from '../chemistry/dissociation.ts';
 import { molecularSO2 } from '../chemistry/molecular-so2.ts';
 import { STAGES_WITHOUT_TARGET, type Target } from '../wine.ts';
 import { aimAt, type Aim } from './aim.ts';
+import { afterMust, MALOLACTIC_UNHARMED_mg_L } from './after-must.ts';
 import type { DoseAnswer, Warning } from './answer.ts';
 import { capped } from './capped.ts';
 import { checkDoseRequest } from './check-request.ts';
@@ -79,6 +80,15 @@ export function dose(request: DoseRequest): DoseAnswer {
           )),
     );
   }
+  const ofMust =
+    request.stage === 'must' && aim.dose_mg_L !== undefined && aim.dose_mg_L > 0
+      ? { after_must: afterMust(aim.dose_mg_L) }
+      : {};
+  if (ofMust.after_must !== undefined && (aim.dose_mg_L ?? 0) > MALOLACTIC_UNHARMED_mg_L)
+    warnings.push({
+      code: 'must-may-hinder-malolactic',
+      values: { malolactic_unharmed_mg_L: MALOLACTIC_UNHARMED_mg_L },
+    });
   const choices =
     target !== undefined && isChoice(request, aim) ? choicesFor(request, target, pK, room) : undefined;
   const { dose_mg_L, add_mg_L } = aim;
@@ -92,6 +102,7 @@ export function dose(request: DoseRequest): DoseAnswer {
     ...aim,
     ...portioned?.shown,
     ...after,
+    ...ofMust,
     ...(limit === undefined ? {} : { limit, limits: limitsOn(room) }),
     ...(cap === undefined ? {} : { capped: cap }),
     warnings: inOrder(warnings),

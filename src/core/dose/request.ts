@@ -13,6 +13,7 @@ export interface LawFacts extends Pick<
   /** Where the total is from: a reading, or a reading and what went in since. */
   readonly total_from?: 'measured' | 'running-sum';
 }
+import type { Fruit } from './fruit.ts';
 import type { SolutionUse } from './solution-recipes.ts';
 
 /** What is known of the wine. Units stand in the names; every one may be unknown. */
@@ -33,6 +34,8 @@ export interface DoseRequest extends WineFacts {
   readonly volume_L?: number;
   /** The same volume as the person wrote it, so that the working shows it so; must be equal to `volume_L`. */
   readonly volume_display?: VolumeShown;
+  /** The fruit of which `volume_L` is the must, where that was told by weight. */
+  readonly fruit?: Fruit;
   /** How many equal vessels or barrels `volume_L` is the sum of, where a reading names several. */
   readonly vessels?: number;
   /** The additive; absent when its name, strength or size is still asked, so that no amount is given. */

@@ -19,6 +19,7 @@ export const WARNING_ORDER: readonly WarningCode[] = [
   'free-over-limit',
   'gas-too-little',
   'addition-large',
+  'must-may-hinder-malolactic',
   'free-needed-high',
   'molecular-above-2',
   'free-low-may-bind-all',

@@ -7,6 +7,7 @@ export const SHOWN_UNITS = {
   '': 1,
   mg: GRAMS_IN.mg * 1000,
   g: 1000,
+  kg: 1_000_000,
   'mg/L': 1,
   'g/L': 1000,
   ...LITRES_IN,

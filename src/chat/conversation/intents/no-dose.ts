@@ -1,9 +1,11 @@
 import type { DoseAnswer } from '../../../core/dose/answer.ts';
 import type { Reading } from '../../reader/understood.ts';
 import type { Line } from '../../replies/reply.ts';
+import { publishedButtons } from '../buttons.ts';
 import { assumedLines } from '../lines/assumed.ts';
 import { factLines } from '../lines/facts.ts';
 import { line } from '../lines/line.ts';
+import { afterMustLines, mustRangeLines } from '../lines/must.ts';
 import { questionLine } from '../lines/question.ts';
 import { vesselText } from '../lines/vessel.ts';
 import { wholeExample } from '../lines/whole-example.ts';
@@ -64,8 +66,21 @@ function askHowMuch(reading: Reading, answer: DoseAnswer, turn: Turn): Outcome {
   return {
     answer,
     inRound: [line('first', 'round-target-stage', { vessel })],
-    lines: [question, ...echo(reading, turn)],
-    buttons: [],
+    lines: [
+      question,
+      ...(reading.fields.stage === 'must' ? publishedLines(reading, turn) : []),
+      ...echo(reading, turn),
+    ],
+    buttons: publishedButtons(turn.ref, reading, turn.manner),
     askedTarget: true,
   };
+}
+
+/** The published figures to choose from, or the question on which they hang, and what follows from an addition. */
+function publishedLines(reading: Reading, { manner }: Turn): Line[] {
+  return [
+    ...mustRangeLines(reading, manner),
+    ...(reading.marks.fruitState === undefined ? [line('effect', 'must-say-state')] : []),
+    ...afterMustLines({}, manner).slice(1),
+  ];
 }

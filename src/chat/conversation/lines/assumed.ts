@@ -1,5 +1,6 @@
 import type { AdditiveId } from '../../../core/additives/additive-id.ts';
 import { ADDITIVES } from '../../../core/additives/additives.ts';
+import { fruitOf } from '../../reader/finish-reading.ts';
 import type { FieldName, Fields, Reading } from '../../reader/understood.ts';
 import { numberText } from '../../replies/number-text.ts';
 import type { Line } from '../../replies/reply.ts';
@@ -66,7 +67,7 @@ function totalSum(
 }
 
 function filledIn(reading: Reading, manner: Manner, weighs: boolean): Part[] {
-  const { assumed, fields, asks } = reading;
+  const { assumed, fields, asks, marks } = reading;
   const parts: Part[] = [];
   const additive = assumed.additive ?? powderWithoutPurity(reading);
   const strength = assumed.additive === undefined ? undefined : assumed.strength_percent;
@@ -84,7 +85,16 @@ function filledIn(reading: Reading, manner: Manner, weighs: boolean): Part[] {
     parts.push(part('note-strength-as-salt', { factor: saltFactor(additive, manner) }));
   if (assumed.target) parts.push(part(targetKey(fields), targetValues(assumed.target, manner)));
   if (assumed.gallon) parts.push(part('assumed-gallon', { gallon: assumed.gallon }));
-  if (assumed.volume_L !== undefined)
+  const fruit = fruitOf(marks, assumed);
+  if (assumed.volume_L !== undefined && fruit !== undefined)
+    parts.push(
+      part(assumed.yield_L_per_100_kg === undefined ? 'assumed-must' : 'assumed-must-usual', {
+        fruit: numberText(fruit.fruit_kg, 1, manner.mark),
+        yield: numberText(fruit.yield_L_per_100_kg, 1, manner.mark),
+        volume: volumeText(assumed.volume_L, manner.volumeUnit, manner.mark),
+      }),
+    );
+  else if (assumed.volume_L !== undefined)
     parts.push(
       part('assumed-barrels', {
         volume: volumeText(assumed.volume_L, 'L', manner.mark),

@@ -7,6 +7,7 @@ import type { Line } from '../../replies/reply.ts';
 import { perLitre, type Manner } from '../manner.ts';
 import { landingLine, rangeText } from './landing.ts';
 import { line } from './line.ts';
+import { afterMustLines } from './must.ts';
 import { bareAmount, measureIn } from './measured.ts';
 
 /** An allowance of half as much again covers a binding of a third (plain arithmetic). */
@@ -23,7 +24,7 @@ export function expectationLines(
   if (percent !== undefined && percent > 0)
     return [...allowance(percent, answer, manner), ...asOther(reading, other, manner)];
   if (share !== undefined) return [...shareLost(share, answer, manner), ...asOther(reading, other, manner)];
-  if (reading.fields.stage === 'must') return [line('effect', 'effect-must')];
+  if (reading.fields.stage === 'must') return afterMustLines(answer, manner);
   if (reading.fields.stage === 'fermenting') return [];
   const landing = landingLine(reading, answer, manner);
   if (landing) return [landing];

@@ -8,6 +8,7 @@ import { readTargetSetting } from './settings/target.ts';
 import { readTimes } from './settings/times.ts';
 import { readUnits } from './settings/units.ts';
 import { readUsualAdditive } from './settings/usual-additive.ts';
+import { readYield } from './settings/yield.ts';
 import { readZone } from './settings/zone.ts';
 import type { Talk } from './talk.ts';
 
@@ -21,6 +22,7 @@ const READERS = [
   readBasis,
   readLaw,
   readReplies,
+  readYield,
   readDays,
 ];
 

@@ -1,6 +1,7 @@
 import { GRAMS_IN } from '../../../core/units/mass.ts';
 import type { Board } from '../board.ts';
-import { claim, figureAt, find, hasTag, isCue, isFree, isMark, refuse, termAt } from '../board.ts';
+import { figureAt, find, hasTag, isCue, isFree, isMark, refuse, termAt } from '../board.ts';
+import { takeFruit, tonIn_kg } from './fruit.ts';
 import type { UnitId } from '../words/words.ts';
 import { MASS_UNITS, concentrationAt, unitAt } from '../units.ts';
 
@@ -36,8 +37,7 @@ function findTons(board: Board, i: number): boolean {
     next?.text === 't' &&
     (isCue(board, behind, 'fruit') || isCue(board, behind, 'variety') || hasTag(board, behind, 'stage:must'));
   if (!isTon) return false;
-  board.marks.fruitByWeight = true;
-  claim(board, i, i + 1);
+  takeFruit(board, figureAt(board, i).value * 1000, i, i + 1);
   return true;
 }
 
@@ -56,8 +56,8 @@ function findMassAt(board: Board, i: number): void {
   if (mayBeGallons(board, unit.to) || isThreeDigits(termAt(board, i).text) || Number.isNaN(value))
     return refuse(board, 'ambiguous-number', i, unit.to);
   if (isOfFruit(board, from, unit.to, unit.id)) {
-    board.marks.fruitByWeight = true;
-    return claim(board, from, unit.to);
+    const grams = unit.id === 'ton' ? tonIn_kg(board, termAt(board, i + 1).text) * 1000 : gramsOf(unit.id);
+    return takeFruit(board, (value * grams) / 1000, from, unit.to);
   }
   if (value < 0) return refuse(board, 'negative-value', from, unit.to);
   const more =
