@@ -198,6 +198,14 @@ dose-capped =
            *[no] {""}
         }{ $after }, limit { $limit } { $unit } ({ rule-short }).
     }
+round-capped =
+    { $of ->
+        [free] { at }free then up to { $after }, limit { $limit } { $unit } free ({ rule-short }).
+       *[total] { at }total then { $least ->
+            [yes] at least{" "}
+           *[no] {""}
+        }{ $after }, limit { $limit } { $unit } ({ rule-short }).
+    }
 dose-at-limit =
     { $least ->
         [yes] { at }measure the total before any of this: it is at least { $now } now, and this would pass the limit { $limit } { $unit } ({ rule-short }).

@@ -748,6 +748,8 @@ export interface SentenceValues {
   'round-amount':
     'additive' | 'all' | 'amount' | 'limited' | 'red' | 'redAmount' | 'strength' | 'tablet' | 'unit';
   'round-and-more': 'count';
+  'round-capped':
+    'after' | 'band' | 'class' | 'high' | 'least' | 'limit' | 'low' | 'of' | 'organic' | 'region' | 'unit' | 'vessel' | 'what';
   'round-choice': 'ph' | 'vessel';
   'round-dose':
     'additive' | 'all' | 'amount' | 'limited' | 'list' | 'red' | 'redAmount' | 'strength' | 'tablet' | 'unit' | 'vessel';
