@@ -43,8 +43,10 @@ export function lastAdditionAt(vessels: readonly string[], { vessels: known }: H
   return times.length === 0 ? undefined : Math.max(...times);
 }
 
-function remarkOf({ remark }: Reading): { remark?: string } {
-  return remark === undefined ? {} : { remark };
+/** What was remarked; that the sample was mixed from several vessels is a remark too, as its figures are those of none. */
+function remarkOf({ remark, marks }: Reading): { remark?: string } {
+  const said = [marks.mixedSample, remark].filter((one) => one !== undefined).join('; ');
+  return said === '' ? {} : { remark: said };
 }
 
 function without(fields: Fields, names: readonly FieldName[]): Fields {

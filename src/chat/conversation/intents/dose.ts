@@ -1,6 +1,7 @@
 import { dose } from '../../../core/dose/dose.ts';
 import type { DoseAnswer, WarningCode } from '../../../core/dose/answer.ts';
 import type { DoseRequest } from '../../../core/dose/request.ts';
+import type { Line } from '../../replies/reply.ts';
 import type { Reading } from '../../reader/understood.ts';
 import { choiceButtons, doseButtons } from '../buttons.ts';
 import { assumedLines } from '../lines/assumed.ts';
@@ -14,6 +15,7 @@ import { firstOfDose, hasAmount } from '../lines/first-dose.ts';
 import { basisLines } from '../lines/basis.ts';
 import { bottledLines } from '../lines/bottled.ts';
 import { line } from '../lines/line.ts';
+import { mixedSampleLines } from '../lines/mixed-sample.ts';
 import { numberText } from '../../replies/number-text.ts';
 import { nothingLines, saidNothingNeeded, saidNothingToWeigh } from '../lines/nothing-needed.ts';
 import { shortLines } from '../lines/stock.ts';
@@ -73,7 +75,7 @@ function wholeDose(reading: Reading, request: DoseRequest, answer: DoseAnswer, t
         manner,
       ),
       ...underLines(answer.warnings, manner),
-      ...warningLines(answer.warnings, manner, 'first', ['free-low-may-bind-all']),
+      ...warningLines(answer.warnings, manner, 'first', ['free-low-may-bind-all']).filter(isOfRound),
     ],
     // A line of a round says no more than its own line; its cautions stand under the round.
     lines: turn.round
@@ -86,6 +88,7 @@ function wholeDose(reading: Reading, request: DoseRequest, answer: DoseAnswer, t
           ...shortLines(toBeWeighed(reading, answer), turn.here),
           ...condition,
           ...expectationLines(reading, answer, otherArithmetic(request), manner),
+          ...mixedSampleLines(reading),
           ...factLines(reading, manner),
           ...assumedLines(reading, manner),
           ...(isNearLimit(answer) ? lawAssumedLines(reading, turn.settings) : []),
@@ -108,6 +111,15 @@ function wholeDose(reading: Reading, request: DoseRequest, answer: DoseAnswer, t
         }),
     ...(inFull && { cautioned: additive.id }),
   };
+}
+
+/** What holds for a market as a whole would stand under every line of a round. */
+function isOfRound({ key }: Line): boolean {
+  return (
+    key !== 'warning-total-unknown-most' &&
+    key !== 'warning-limit-unconfirmed' &&
+    key !== 'warning-no-limit-on-file'
+  );
 }
 
 /** Whether the wine comes near a limit, or passes it, so that what was taken for it is worth a word. */

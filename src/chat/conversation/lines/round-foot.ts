@@ -52,6 +52,7 @@ export function roundFoot(
     ...(said.some(({ reading }) => reading.problems.length > 0) ? [line('question', 'round-again')] : []),
     ...mergeLists(assumed),
     ...lowLines(said),
+    ...mixedLines(said),
     ...roundCautions([...new Set<AdditiveId>(weighed)], cautioned),
   ];
 }
@@ -95,6 +96,16 @@ function stockLines(said: readonly SaidInRound[], mark: DecimalMark): Line[] {
       values: { strength },
     })),
   ];
+}
+
+/** The lines of a round that one mixed sample stands for. */
+function mixedLines(said: readonly SaidInRound[]): Line[] {
+  const mixed = said.filter(({ reading }) => reading.marks.mixedSample !== undefined);
+  return listLine(
+    'caution',
+    'round-mixed',
+    mixed.map(({ name }) => part('round-name', { name })),
+  );
 }
 
 /** The vessels whose free SO2 is so low that much may bind. */
