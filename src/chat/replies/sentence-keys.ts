@@ -431,6 +431,14 @@ export interface SentenceValues {
   'help-reminders-4': never;
   'help-reminders-5': never;
   'help-reminders-6': never;
+  'help-round-1': never;
+  'help-round-2': never;
+  'help-round-3': never;
+  'help-round-4': never;
+  'help-round-5': never;
+  'help-round-6': never;
+  'help-round-7': never;
+  'help-round-8': never;
   'help-settings-1': never;
   'help-settings-2': never;
   'help-settings-3': never;
