@@ -1,5 +1,5 @@
 import type { Entry } from './entry.ts';
-import { isLot, lotKey, lotsLeft } from './lots-left.ts';
+import { isLot, lotKey, lotsLeft, type LotLeft } from './lots-left.ts';
 import type { LotKept, Shelf } from './shelf.ts';
 import { stockMove, type StockMove } from './stock-move.ts';
 
@@ -85,4 +85,4 @@ function spread(lots: readonly LotKept[], move: StockMove, entry: Entry): LotKep
   return more > 0 ? [...filled, lotOf(entry, { ...move, amount: more })] : filled;
 }
 
-const withLeft = ({ left, ...lot }: LotKept & { readonly left: number }): LotKept => ({ ...lot, held: left });
+const withLeft = ({ left, ...lot }: LotLeft): LotKept => ({ ...lot, held: left });

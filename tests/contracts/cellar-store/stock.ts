@@ -2,7 +2,7 @@ import fc from 'fast-check';
 import { expect, test } from 'vitest';
 import { applyToShelf } from '../../../src/core/cellar/apply-to-shelf.ts';
 import type { CellarStore } from '../../../src/core/cellar/cellar-store.ts';
-import type { Happening, LoggedEntry, NewEntry, StockMovement } from '../../../src/core/cellar/entry.ts';
+import type { LoggedEntry, NewEntry, StockMovement } from '../../../src/core/cellar/entry.ts';
 import { lotsLeft } from '../../../src/core/cellar/lots-left.ts';
 import type { Shelf } from '../../../src/core/cellar/shelf.ts';
 import { stockMove } from '../../../src/core/cellar/stock-move.ts';
@@ -20,9 +20,9 @@ const balance_g = async (store: CellarStore): Promise<number | undefined> => {
 
 const kmbs = { vessels: [], additive: 'potassium-metabisulfite', ph: undefined } as const;
 const stock = (at: number, event: StockMovement['event'], mass_g: number): NewEntry =>
-  note(at, { ...kmbs, kind: 'stock', event, mass_g } as Partial<Happening>);
+  note(at, { ...kmbs, kind: 'stock', event, mass_g });
 const addition = (at: number, mass_g: number): NewEntry =>
-  note(at, { ...kmbs, kind: 'addition', vessels: ['tank 4'], mass_g } as Partial<Happening>);
+  note(at, { ...kmbs, kind: 'addition', vessels: ['tank 4'], mass_g });
 
 /** The shelves by a log, in the plainest way: all that counts, one after the other. */
 function plainShelves(log: readonly LoggedEntry[]): readonly Shelf[] {

@@ -16,12 +16,23 @@ function logOf(...told: readonly Partial<Happening>[]): Entry[] {
   );
 }
 
-const received = (mass_g: number, chemical_lot?: string): Partial<Happening> =>
-  ({ kind: 'stock', event: 'received', mass_g, ...(chemical_lot && { chemical_lot }) }) as Partial<Happening>;
-const added = (mass_g: number, chemical_lot?: string): Partial<Happening> =>
-  ({ kind: 'addition', mass_g, ...(chemical_lot && { chemical_lot }) }) as Partial<Happening>;
-const counted = (mass_g: number, chemical_lot?: string): Partial<Happening> =>
-  ({ kind: 'stock', event: 'counted', mass_g, ...(chemical_lot && { chemical_lot }) }) as Partial<Happening>;
+const received = (mass_g: number, chemical_lot?: string): Partial<Happening> => ({
+  kind: 'stock',
+  event: 'received',
+  mass_g,
+  ...(chemical_lot && { chemical_lot }),
+});
+const added = (mass_g: number, chemical_lot?: string): Partial<Happening> => ({
+  kind: 'addition',
+  mass_g,
+  ...(chemical_lot && { chemical_lot }),
+});
+const counted = (mass_g: number, chemical_lot?: string): Partial<Happening> => ({
+  kind: 'stock',
+  event: 'counted',
+  mass_g,
+  ...(chemical_lot && { chemical_lot }),
+});
 
 /** What is left of each lot in grams, by its name, and in all. */
 function leftOf(...told: readonly Partial<Happening>[]): Record<string, number> {
@@ -104,7 +115,7 @@ test.each([
   [{ additive: 'sodium-metabisulfite', mass_g: 1 }, { mass_g: 1 }],
 ] as const)('%o and %o stand on two shelves', (one, other) => {
   const shelfOf = (more: object): string | undefined =>
-    stockMove({ kind: 'addition', ...KMBS, ...more } as Happening)?.shelf;
+    stockMove({ kind: 'addition', ...KMBS, ...more })?.shelf;
   expect(shelfOf(one)).toBeDefined();
   expect(shelfOf(one)).not.toBe(shelfOf(other));
 });

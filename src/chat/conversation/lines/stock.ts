@@ -17,7 +17,11 @@ const OLD_days = 365;
 /** Less than this share of what came in last is running low (own threshold). */
 const LOW_share = 0.1;
 
-/** Values that say how much of what there is, and in what it is counted. */
+/**
+ * Values that say how much of what there is, and in what it is counted.
+ *
+ * @param thousandths of the shelf's unit
+ */
 export function stockValues(
   { kind, unit }: Pick<Shelf, 'kind' | 'unit'>,
   thousandths: number,
@@ -35,7 +39,11 @@ export function stockValues(
   };
 }
 
-/** An amount of the store, with a minus where it is below zero; the word for tablets is the sentence's. */
+/**
+ * An amount of the store, with a minus where it is below zero; the word for tablets is the sentence's.
+ *
+ * @param thousandths of `unit`
+ */
 export function stockAmount(
   thousandths: number,
   unit: StockUnit,
