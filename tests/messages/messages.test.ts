@@ -1,5 +1,12 @@
+import { readdirSync } from 'node:fs';
 import { describe, expect, test } from 'vitest';
+import { LANGUAGES } from '../../src/chat/reader/words/languages.ts';
 import { judge, labelledIn } from './judge.ts';
+
+/** Each language but English has a folder of its own: every file in it is read. */
+const ofLanguages = LANGUAGES.filter((language) => language !== 'en').flatMap((language) =>
+  readdirSync(new URL(language, import.meta.url)).map((name) => `${language}/${name}`),
+);
 
 for (const file of [
   'en.jsonl',
@@ -9,10 +16,13 @@ for (const file of [
   'en-words.jsonl',
   'en-marks.jsonl',
   'en-solutions.jsonl',
+  'en-rounds.jsonl',
   'en-must.jsonl',
+  'en-law.jsonl',
   'refused.en.jsonl',
   'emergency.jsonl',
   'en-commands.jsonl',
+  ...ofLanguages,
 ]) {
   describe(`messages of ${file} are read as their labels say`, () => {
     test.each(labelledIn(file))('$id reads as it was meant: $text', (labelled) => {
@@ -23,8 +33,11 @@ for (const file of [
 }
 
 describe('the own words, statements, moments, lots and remarks of a message are read as its label says', () => {
-  test.each(labelledIn('en-commands.jsonl'))('$id reads as it was meant: $text', (labelled) => {
-    const { beside } = judge(labelled);
-    expect(beside.read).toEqual(beside.wanted);
-  });
+  test.each([...labelledIn('en-commands.jsonl'), ...labelledIn('en-law.jsonl')])(
+    '$id reads as it was meant: $text',
+    (labelled) => {
+      const { beside } = judge(labelled);
+      expect(beside.read).toEqual(beside.wanted);
+    },
+  );
 });

@@ -898,6 +898,7 @@ export interface SentenceValues {
   'step-dose-with-allowance': never;
   'step-dose-with-share': never;
   'step-free-after': never;
+  'step-free-before-bottling': never;
   'step-free-needed': never;
   'step-gas-by-purity': never;
   'step-iodate-normality': never;
@@ -906,6 +907,7 @@ export interface SentenceValues {
   'step-molecular-now': never;
   'step-molecular-sure': never;
   'step-must-of-fruit': never;
+  'step-oxygen-loss': never;
   'step-room-to-limit': never;
   'step-salt-by-recipe': never;
   'step-salt-mass': never;

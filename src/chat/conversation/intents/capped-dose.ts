@@ -5,6 +5,7 @@ import { basisLines } from '../lines/basis.ts';
 import { bottledLines } from '../lines/bottled.ts';
 import {
   cappedFirst,
+  cappedInRound,
   designationLines,
   keptLine,
   lawAssumedLines,
@@ -46,13 +47,16 @@ export function cappedDose(reading: Reading, answer: Capped, turn: Turn): Outcom
     inRound:
       first === undefined || additive === undefined
         ? [head]
-        : roundDoseLine(
-            vesselText(reading),
-            turn.round?.own ?? reading,
-            { ...answer, warnings: given.warnings },
-            turn.round?.isOneAdditive ? undefined : additive,
-            manner,
-          ),
+        : [
+            ...roundDoseLine(
+              vesselText(reading),
+              turn.round?.own ?? reading,
+              { ...answer, warnings: given.warnings },
+              turn.round?.isOneAdditive ? undefined : additive,
+              manner,
+            ),
+            cappedInRound(reading, answer, manner),
+          ],
     lines: [
       ...bottledLines(reading),
       head,

@@ -45,6 +45,12 @@ export function limitValues(reading: Reading, answer: Capped, manner: Manner): L
   };
 }
 
+/** Under its line in a round: what the smaller dose gives, and the rule that it keeps. */
+export function cappedInRound(reading: Reading, answer: Capped, manner: Manner): Line {
+  const { values } = cappedFirst(line('first', 'dose-capped'), reading, answer, manner);
+  return line('first', 'round-capped', values);
+}
+
 /** The first line of a smaller dose: the amount, what it gives, and the rule that it keeps. */
 export function cappedFirst(first: Line, reading: Reading, answer: Capped, manner: Manner): Line {
   const { key, values } = first;

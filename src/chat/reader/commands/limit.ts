@@ -20,9 +20,13 @@ const BESIDE: readonly OwnWordId[] = ['limit', 'ask', 'show', 'is', 'of', 'for',
 
 const isOne = ({ ids }: Piece, of: readonly OwnWordId[]): boolean => ids.some((id) => of.includes(id));
 
-/** Whether the word for a limit comes before the wine, after no more than a question or courtesy. */
-function opens({ pieces }: Board): boolean {
-  const [first] = pieces.filter((piece) => !isOne(piece, ['ask', 'show', 'filler', 'courtesy', 'article']));
+/** Whether the word for a limit comes first, after no more than a question, courtesy, or the name of a vessel. */
+function opens({ pieces, findings }: Board): boolean {
+  const isOfVessel = ({ from, to }: Piece): boolean =>
+    findings.some((finding) => from >= finding.from && to <= finding.to);
+  const [first] = pieces.filter(
+    (piece) => !isOfVessel(piece) && !isOne(piece, ['ask', 'show', 'filler', 'courtesy', 'article']),
+  );
   return first !== undefined && isOne(first, ['limit']);
 }
 
