@@ -61,7 +61,7 @@ export function buttonKey(
 
 /** Whether it was told of a red that acidified methods read high. */
 export function redToldKey(vessel: string): string {
-  return `red reads high ${vessel}`;
+  return `red-told ${vessel}`;
 }
 
 /** Who is about to dose a vessel. */

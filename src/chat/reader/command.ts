@@ -112,8 +112,8 @@ export type Command =
   | {
       readonly name: 'table';
       readonly molecular_mg_L: readonly number[];
-      readonly ph_from?: number;
-      readonly ph_to?: number;
+      readonly ph_from?: number; // pH
+      readonly ph_to?: number; // pH
     }
   | { readonly name: 'molecular' } // molecular T4: by both bases
   | { readonly name: 'forecast' } // forecast T4

@@ -18,8 +18,8 @@ import type { Vessel } from './vessel.ts';
  * freePoints({ ...tank, additions: [{ entry: 2, at: 5, by: 1 }] }).length // => 1
  * ```
  */
-export function freePoints({ readings, additions, wine_since = -Infinity }: Vessel): readonly FreePoint[] {
-  const since = Math.max(wine_since, ...additions.map(({ at }) => at));
+export function freePoints({ readings, additions, changed_at = -Infinity }: Vessel): readonly FreePoint[] {
+  const since = Math.max(changed_at, ...additions.map(({ at }) => at));
   return readings.flatMap(({ at, free_mg_L }) =>
     free_mg_L === undefined || at < since ? [] : [{ at, free_mg_L }],
   );

@@ -125,7 +125,7 @@ function blended(from: Vessel, to: Vessel, { at, entry, volume_L }: Entry & Vess
     unlanded: [],
     added_since_total_mg_L: 0,
     landings: [],
-    wine_since: at,
+    changed_at: at,
     ...(bound_before && { bound_before }),
   };
   const unmeasured = withoutPH(mixed, 'blended', at);

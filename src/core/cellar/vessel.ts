@@ -92,8 +92,8 @@ export interface Vessel {
   readonly landings: readonly Landing[];
   /** What the wines bound that it was mixed of, by volume. */
   readonly bound_before?: Learned;
-  /** Since when the wine is the one it is: blended, fermented or through malolactic then. */
-  readonly wine_since?: number;
+  /** When the wine became another for the last time: it was blended, or fermented, or went through malolactic. */
+  readonly changed_at?: number;
   readonly orders: readonly OpenOrder[];
   readonly later?: number;
   readonly unwatched?: true;

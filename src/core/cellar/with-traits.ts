@@ -35,7 +35,7 @@ export function withTraits(vessel: Vessel, told: WineTraits, { at, entry }: Entr
 /** A wine that binds otherwise than before: what was learned of it holds no longer. */
 function asNewWine(vessel: Vessel, at: number): Vessel {
   const { bound_before: _bound, ...others } = vessel;
-  return { ...others, landings: [], wine_since: at };
+  return { ...others, landings: [], changed_at: at };
 }
 
 /** Whether what was must is wine now: its pH is another, and what went into the must has bound. */

@@ -1,5 +1,5 @@
 import { blend, type BlendPart } from '../../../core/blend/blend.ts';
-import { shareWithin, type BlendBounds, type ShareFound } from '../../../core/blend/share-within.ts';
+import { shareWithin, type BlendBounds } from '../../../core/blend/share-within.ts';
 import type { CellarView } from '../../../core/cellar/cellar-store.ts';
 import { holdsWine } from '../../../core/cellar/pour.ts';
 import type { Vessel } from '../../../core/cellar/vessel.ts';
@@ -18,17 +18,10 @@ import { replying } from '../replying.ts';
 import { totalOfVessel } from '../total-of-vessel.ts';
 import type { BlendData } from './lab-answer.ts';
 import { lacking, unlanded } from './lacking.ts';
+import type { Tried } from './tried.ts';
 
 /** So many other vessels are told of, those that it takes the least of first. */
 const CANDIDATES = 5;
-
-/** A wine with another, and which shares of that one keep to the bounds. */
-export interface Tried {
-  readonly wine: Vessel;
-  readonly other: Vessel;
-  readonly bounds: BlendBounds;
-  readonly found: ShareFound;
-}
 
 /** `blend T4 T7`, `blend T4`: which share of the second, or of which other vessel, brings the first within bounds. */
 export async function tellBlend(
@@ -57,10 +50,9 @@ async function tellCandidates(wine: Vessel, here: Here, view: CellarView): Promi
     .filter(({ found }) => found.fails === undefined)
     .toSorted((a, b) => (a.found.least ?? 1) - (b.found.least ?? 1));
   const lines: Line[] = [
-    line('first', fitting.length === 0 ? 'blend-nobody' : 'blend-candidates', {
-      vessel: vesselName(wine.vessel),
-      count: String(tried.length),
-    }),
+    fitting.length === 0
+      ? line('first', 'blend-nobody', { vessel: vesselName(wine.vessel), count: String(tried.length) })
+      : line('first', 'blend-candidates', { vessel: vesselName(wine.vessel) }),
     ...fitting.slice(0, CANDIDATES).map((one) => candidateLine(one, here)),
     ...(fitting.length === 0 ? [] : [line('effect', 'blend-care')]),
   ];

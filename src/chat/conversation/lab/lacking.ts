@@ -10,7 +10,11 @@ export type Lack = 'vessel' | 'ph' | 'free' | 'total' | 'target';
 /** What is missing before anything can be told of a vessel, and the message that gives it. */
 export function lacking(what: Lack, name: string | undefined, here: Here): Handled {
   const vessel = name === undefined ? 'none' : vesselName(name);
-  const lines = [line('first', what === 'vessel' ? 'vessel-unknown' : 'lab-lacks', { vessel, what })];
+  const lines = [
+    what === 'vessel'
+      ? line('first', 'vessel-unknown', { vessel })
+      : line('first', 'lab-lacks', { vessel, what }),
+  ];
   return replying(here, { lines });
 }
 

@@ -50,7 +50,6 @@ export function tellTooMuch(name: string | undefined, here: Here): Handled {
       line('effect', 'too-much-blend', { vessel: vesselName(vessel.vessel) }),
       line('effect', 'too-much-peroxide', {
         says: law?.says ?? 'none',
-        region,
         left: law?.left_most_mg_L === undefined ? 'none' : numberText(law.left_most_mg_L, 0, mark),
       }),
     ],

@@ -6,7 +6,7 @@ import type { Line } from '../../replies/reply.ts';
 import { vesselName } from '../../replies/vessel-name.ts';
 import { volumeText } from '../../replies/volume-text.ts';
 import type { Here } from '../here.ts';
-import type { Tried } from '../lab/blend.ts';
+import type { Tried } from '../lab/tried.ts';
 import { tellingOf } from '../telling.ts';
 import { line, listLine, part } from './line.ts';
 
@@ -15,7 +15,7 @@ export function blendLines(tried: Tried, whole: Blend | undefined, here: Here): 
   return [
     ...(tried.found.fails === undefined ? [shareLine(tried, here)] : [failLine(tried, here)]),
     ...boundLines(tried, here),
-    ...wholeLines(tried, whole, here),
+    ...wholeLines(whole, here),
     figureLine(tried, here),
     line('effect', 'blend-care'),
   ];
@@ -96,15 +96,13 @@ function figureLine({ wine, other }: Tried, here: Here): Line {
   return { ...line('assumed', 'blend-figures'), list: [of(wine), of(other)] };
 }
 
-function wholeLines({ wine, other }: Tried, whole: Blend | undefined, here: Here): Line[] {
+function wholeLines(whole: Blend | undefined, here: Here): Line[] {
   if (whole === undefined) return [];
   const mark = here.memory.decimalMark ?? '.';
   const text = (mg_L: number | undefined): string =>
     mg_L === undefined ? 'none' : numberText(mg_L, 0, mark);
   return [
     line('effect', 'blend-whole', {
-      vessel: vesselName(wine.vessel),
-      other: vesselName(other.vessel),
       volume: volumeText(whole.volume_L, here.settings.volumeUnit, mark),
       free: text(whole.free_mg_L),
       total: text(whole.total_mg_L),

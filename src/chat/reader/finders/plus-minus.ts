@@ -41,7 +41,7 @@ export function findPlusMinus(board: Board): void {
 function readOne(
   board: Board,
   of: number,
-  { from, figure }: { readonly from: number; readonly figure: number },
+  { from, figure }: { readonly from: number; readonly figure: number /* its position */ },
 ): void {
   const isPercent = isMark(board, figure + 1, '%');
   const to = isPercent ? figure + 1 : (concentrationAt(board, figure + 1)?.to ?? figure);

@@ -28,7 +28,7 @@ const isLink = (piece: Piece | undefined): boolean =>
 
 interface Neighbour {
   readonly label: LabLabel;
-  readonly piece: number;
+  readonly piece: number; // its position
 }
 
 function behind(pieces: readonly Piece[], { to }: LabFigure): Neighbour | undefined {

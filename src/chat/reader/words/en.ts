@@ -397,7 +397,8 @@ export const en: Words = {
     'cue:pdo': ['pdo', 'pdo wine', 'national pdo'],
     'cue:bulk': ['bulk wine', 'bulk export', 'in bulk', 'bulk for export', 'for bulk export'],
     'cue:keep': ['keep', 'keep back', 'hold back', 'set aside', 'reserve', 'save', 'leave', 'leave room for', 'keep room for'],
-    'cue:bottling': ['bottling'],
+    'cue:bottling': ['bottling', 'to bottle', 'for bottling', 'before bottling', 'at bottling', 'pre bottling', 'prebottling', 'bottling day'],
+    'cue:oxygen': ['oxygen', 'o2', 'dissolved oxygen', 'diss oxygen', 'dissolved o2', 'd o', 'tpo', 'total package oxygen', 'total oxygen', 'headspace oxygen'],
     'cue:bottling-reserve': ['bottling reserve', 'reserve for bottling', 'kept for bottling'],
     'cue:bottle-unit': ['bottle', 'bottles', 'btl', 'btls', 'magnum', 'magnums'],
     'cue:plain': [
