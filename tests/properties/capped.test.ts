@@ -2,7 +2,7 @@ import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { capped } from '../../src/core/dose/capped.ts';
 import { dose } from '../../src/core/dose/dose.ts';
-import type { DoseAnswer } from '../../src/core/dose/answer.ts';
+import type { CappedDose, DoseAnswer } from '../../src/core/dose/answer.ts';
 import type { DoseRequest } from '../../src/core/dose/request.ts';
 import { toStep } from '../../src/core/dose/rounding.ts';
 import { REGIONS } from '../../src/core/limits/region.ts';
@@ -36,6 +36,12 @@ const lawful = fc
 /** What the wine has of what a limit counts, with what the instrument shows in it. */
 function reached(answer: DoseAnswer, request: { total_mg_L: number; free_mg_L: number }) {
   const { capped: cap } = answer;
+  // A stock is of the powder in grams per 100 mL, measured in whole or tenths of millilitres.
+  const isMore = ({ stock }: Pick<CappedDose, 'stock'>): boolean =>
+    stock !== undefined &&
+    stock.measure.unit === 'mL' &&
+    stock.measure.value > stock.additive_volume_mL * (1 + 1e-9);
+  if (cap !== undefined) expect([isMore(cap), isMore(cap.per_vessel ?? {})]).toEqual([false, false]);
   const into = cap === undefined ? 0 : cap.dose_mg_L + (cap.rounding_mg_L ?? 0);
   const each = cap === undefined ? 0 : cap.dose_mg_L + (cap.per_vessel?.rounding_mg_L ?? 0);
   return { total: request.total_mg_L + Math.max(into, each), free: request.free_mg_L + Math.max(into, each) };

@@ -3,7 +3,7 @@ import type { AdditiveAtHand } from '../additives/additive-id.ts';
 import { ADDITIVES } from '../additives/additives.ts';
 import type { AdditiveAmount } from '../additives/so2-in.ts';
 import type { AsStock, Measure, PerVessel } from './answer.ts';
-import { measureOf, type Instrument, type Rounded } from './rounding.ts';
+import { measureOf, type Instrument, type Rounded, type RoundingLimits } from './rounding.ts';
 import { RISE_NEGLIGIBLE_mg_L } from './thresholds.ts';
 
 /** Strength of the stock that small amounts are also given in, grams of powder in 100 mL (common practice). */
@@ -42,7 +42,7 @@ const STOCK_OF = {
   tablet: 'potassium-metabisulfite-solution',
 } as const;
 
-function stockFor(additive: AdditiveAtHand, SO2_g: number, dose_mg_L: number): AsStock | undefined {
+function stockFor(additive: AdditiveAtHand, SO2_g: number, limits: RoundingLimits): AsStock | undefined {
   const { id } = additive;
   if (id !== 'potassium-metabisulfite' && id !== 'sodium-metabisulfite' && id !== 'tablet') return undefined;
   // The stock is made of the same powder, so its strength counts in grams of that powder.
@@ -56,7 +56,7 @@ function stockFor(additive: AdditiveAtHand, SO2_g: number, dose_mg_L: number): A
   const mass_g = amountFor(SO2_g, powder)?.mass_g;
   if (mass_g === undefined) return undefined;
   const additive_volume_mL = (mass_g / STOCK_PERCENT) * 100;
-  const { measure } = measureOf(additive_volume_mL, 'cylinder', { dose_mg_L });
+  const { measure } = measureOf(additive_volume_mL, 'cylinder', limits);
   return { additive: STOCK_OF[id], strength_percent: STOCK_PERCENT, additive_volume_mL, measure };
 }
 
@@ -78,20 +78,22 @@ export function measured(portion: Portion): Measured | undefined {
   const amount = amountFor(SO2_g, additive);
   if (amount === undefined) return undefined;
   const [size, instrument] = instrumentFor(amount);
-  const rounded = measureOf(size, instrument, {
-    dose_mg_L,
-    ...(ceiling_mg_L === undefined ? {} : { ceiling_mg_L }),
-  });
+  const limits = { dose_mg_L, ...(ceiling_mg_L === undefined ? {} : { ceiling_mg_L }) };
+  const rounded = measureOf(size, instrument, limits);
   const whole = { amount: { SO2_g, ...amount }, rounded };
   const { measure, rounding_mg_L } = rounded;
   if (instrument !== 'tablets') {
     const small = ADDITIVES[additive.id].kind === 'powder' && size < STOCK_BELOW_g;
-    const stock = small ? stockFor(additive, SO2_g, dose_mg_L) : undefined;
+    const stock = small ? stockFor(additive, SO2_g, limits) : undefined;
     return { ...whole, measure, rounding_mg_L, ...(stock === undefined ? {} : { stock }) };
   }
   const rest_g = SO2_g * (1 - measure.value / size);
   const rest_mg_L = dose_mg_L * (1 - measure.value / size);
-  const stock = rest_mg_L < RISE_NEGLIGIBLE_mg_L ? undefined : stockFor(additive, rest_g, rest_mg_L);
+  const left = ceiling_mg_L === undefined ? {} : { ceiling_mg_L: ceiling_mg_L - (dose_mg_L - rest_mg_L) };
+  const stock =
+    rest_mg_L < RISE_NEGLIGIBLE_mg_L
+      ? undefined
+      : stockFor(additive, rest_g, { dose_mg_L: rest_mg_L, ...left });
   const rest = stock === undefined ? {} : { stock };
   if (measure.value === 0) return { ...whole, ...rest };
   return { ...whole, measure, rounding_mg_L, measure_gives_mg_L: dose_mg_L + rounding_mg_L, ...rest };

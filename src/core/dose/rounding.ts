@@ -101,7 +101,8 @@ export function measureOf(amount: number, instrument: Instrument, limits: Roundi
   if (
     ceiling_mg_L !== undefined &&
     dose_mg_L !== undefined &&
-    dose_mg_L <= ceiling_mg_L &&
+    // A hair above the ceiling is at it: two sums of the same figures.
+    dose_mg_L <= ceiling_mg_L * (1 + 1e-9) &&
     mg_L_of(value) > ceiling_mg_L
   ) {
     down = true;
