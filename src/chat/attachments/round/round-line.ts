@@ -60,11 +60,21 @@ export function roundLine(
     vesselPart(cellOf('vessel'), headingOf('vessel')?.word ?? '', settings),
     volumePart(cellOf('volume'), headingOf('volume'), cellOf('unit'), settings),
     traitPart(cellOf('style'), settings),
-    ...(Object.keys(BEFORE) as RoundColumn[]).map((of) =>
+    ...columnsIn(headingOf('add')?.word ?? '').map((of) =>
       figurePart(of, cellOf(of), headingOf(of)?.word ?? ''),
     ),
   ];
   return parts.includes(undefined) ? undefined : parts.filter((one) => one !== '').join(' ');
+}
+
+/**
+ * The columns in the order of a line. An addition whose heading does not say SO2 stands right before the additive: there the
+ * reader asks whether it is SO2 or the powder itself.
+ */
+function columnsIn(headingOfAdd: string): RoundColumn[] {
+  const columns = Object.keys(BEFORE) as RoundColumn[];
+  if (/so2/i.test(headingOfAdd)) return columns;
+  return [...columns.filter((of) => of !== 'additive'), 'additive'];
 }
 
 function vesselPart(cell: TableCell, heading: string, settings: ReaderSettings): string | undefined {
@@ -112,13 +122,12 @@ function traitPart(cell: TableCell, settings: ReaderSettings): string {
 function figurePart(of: RoundColumn, cell: TableCell, heading: string): string | undefined {
   if (cell === undefined) return '';
   const text = typeof cell === 'number' ? String(Number(cell.toPrecision(10))) : cellText(cell).trim();
-  if (of === 'additive') return ADDITIVE.test(text) ? `${text},` : undefined;
+  if (of === 'additive') return ADDITIVE.test(text) ? text : undefined;
   if (of === 'temperature')
     return TEMPERATURE.test(text)
       ? `${text.replace(/[\s°CF]+$/i, '')} °${/f$/i.test(text) ? 'F' : 'C'}`
       : undefined;
   if (!FIGURE.test(text)) return undefined;
-  // Beside an additive an addition is asked about: SO2 or the powder itself? A heading that says SO2 answers it.
   const unit =
     of !== 'add' ? '' : `${/[a-z]$/i.test(text) ? '' : ' mg/L'}${/so2/i.test(heading) ? ' SO2' : ''}`;
   return `${BEFORE[of]}${text}${unit}`;

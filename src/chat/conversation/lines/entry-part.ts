@@ -31,7 +31,10 @@ export function entryPart(entry: LoggedEntry, here: Pick<Here, 'settings' | 'mem
       };
     }
     case 'reading':
-      return { ...part('entry-reading', { vessel }), list: measuredParts(entry, mark) };
+      return {
+        ...part('entry-reading', { vessel }),
+        list: [...measuredParts(entry, mark), ...besideAmount(entry)],
+      };
     case 'vessel': {
       const list = toldParts(entry, here.settings.volumeUnit, mark);
       const values = { vessel, ...eventValues(entry, here), told: list.length === 0 ? 'none' : 'some' };
