@@ -1,5 +1,5 @@
-import type { Shelf } from '../../../core/cellar/shelf.ts';
 import { stockMove } from '../../../core/cellar/stock-move.ts';
+import type { KeptShelf } from '../projection/kept-shelf.ts';
 import type { Ledger, WaypointPlace } from '../projection/ledger.ts';
 import { comparePoints, type Point } from '../projection/point.ts';
 import type { Standing } from '../projection/standing.ts';
@@ -74,7 +74,7 @@ export function createMemoryLedger(cellar: MemoryCellar, change: Undoable): Ledg
         if (standing === undefined) change.remove(cellar.standings, vessel);
         else change.set(cellar.standings, vessel, JSON.stringify(standing));
     },
-    shelves: async () => Array.from(cellar.shelves.values(), (text) => JSON.parse(text) as Shelf),
+    shelves: async () => Array.from(cellar.shelves.values(), (text) => JSON.parse(text) as KeptShelf),
     saveShelves: async (shelves) => {
       for (const [name, shelf] of shelves)
         if (shelf === undefined) change.remove(cellar.shelves, name);

@@ -1,6 +1,6 @@
 import type { CellarView, Person } from '../../../core/cellar/cellar-store.ts';
-import type { Shelf } from '../../../core/cellar/shelf.ts';
 import type { Vessel } from '../../../core/cellar/vessel.ts';
+import { shelfOf, type KeptShelf } from '../projection/kept-shelf.ts';
 import type { Standing } from '../projection/standing.ts';
 import { counts, entryOf, inOrder, loggedOf, type MemoryCellar } from './memory-cellar.ts';
 
@@ -39,8 +39,8 @@ export function createMemoryView(cellar: MemoryCellar, now: () => number): Cella
       return states.sort((one, other) => (one.vessel < other.vessel ? -1 : 1));
     },
     shelves: async () =>
-      Array.from(cellar.shelves.values(), (text) => JSON.parse(text) as Shelf).sort((one, other) =>
-        one.shelf < other.shelf ? -1 : 1,
+      Array.from(cellar.shelves.values(), (text) => shelfOf(JSON.parse(text) as KeptShelf)).sort(
+        (one, other) => (one.shelf < other.shelf ? -1 : 1),
       ),
     person: async (id) => {
       const found = [...cellar.people].find(([, person]) => person.id === id);

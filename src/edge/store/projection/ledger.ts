@@ -1,6 +1,6 @@
 import type { AdditiveId } from '../../../core/additives/additive-id.ts';
 import type { Entry, LoggedEntry } from '../../../core/cellar/entry.ts';
-import type { Shelf } from '../../../core/cellar/shelf.ts';
+import type { KeptShelf } from './kept-shelf.ts';
 import type { Point } from './point.ts';
 import type { Standing } from './standing.ts';
 
@@ -39,9 +39,9 @@ export interface Ledger {
   dropWaypoints(places: readonly WaypointPlace[]): Promise<void>;
   save(change: ProjectionChange): Promise<void>;
   /** The shelves of the chemical store. */
-  shelves(): Promise<readonly Shelf[]>;
+  shelves(): Promise<readonly KeptShelf[]>;
   /** Shelves as they are now; undefined where there is none any more. */
-  saveShelves(shelves: ReadonlyMap<string, Shelf | undefined>): Promise<void>;
+  saveShelves(shelves: ReadonlyMap<string, KeptShelf | undefined>): Promise<void>;
   /** What counts of the stock of an additive, and of additions of it, from a point on, in order. */
   movesOf(additive: AdditiveId, from: Point): Promise<readonly Entry[]>;
 }

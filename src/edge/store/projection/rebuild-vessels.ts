@@ -1,8 +1,8 @@
 import { isDeepStrictEqual } from 'node:util';
-import type { Shelf } from '../../../core/cellar/shelf.ts';
 import { fold } from './fold.ts';
 import type { Ledger, WaypointPlace } from './ledger.ts';
 import type { Point } from './point.ts';
+import { shelfOf, type KeptShelf } from './kept-shelf.ts';
 import { foldShelves } from './project-shelves.ts';
 import { isWaypoint, type Standing } from './standing.ts';
 
@@ -26,7 +26,7 @@ export async function rebuildVessels(
   apart: (work: () => Promise<void>) => Promise<void>,
 ): Promise<Rebuilt> {
   const standings = new Map<string, Standing>();
-  const shelves = new Map<string, Shelf>();
+  const shelves = new Map<string, KeptShelf>();
   const differed = new Set<string>();
   const leftOver = new Map((await ledger.waypointPlaces()).map((place) => [nameOf(place), place]));
 
@@ -67,13 +67,19 @@ export async function rebuildVessels(
 }
 
 /** Keeps the shelves as they follow from the log; gives back those of which something else had been kept. */
-async function mendShelves(ledger: Ledger, shelves: ReadonlyMap<string, Shelf>): Promise<readonly string[]> {
+async function mendShelves(
+  ledger: Ledger,
+  shelves: ReadonlyMap<string, KeptShelf>,
+): Promise<readonly string[]> {
   const kept = new Map((await ledger.shelves()).map((shelf) => [shelf.shelf, shelf]));
   const names = [...new Set([...kept.keys(), ...shelves.keys()])];
-  const changed = names.filter((name) => !isSame(shelves.get(name), kept.get(name)));
+  const changed = names.filter((name) => !isSame(bare(shelves.get(name)), bare(kept.get(name))));
   if (changed.length > 0) await ledger.saveShelves(new Map(changed.map((name) => [name, shelves.get(name)])));
   return changed;
 }
+
+/** What a shelf was before its last count need not be known. */
+const bare = (shelf: KeptShelf | undefined): unknown => shelf && shelfOf(shelf);
 
 const nameOf = ({ vessel, at, entry }: WaypointPlace): string => JSON.stringify([vessel, at, entry]);
 

@@ -1,5 +1,5 @@
 import type { Kysely } from 'kysely';
-import type { Shelf } from '../../../core/cellar/shelf.ts';
+import type { KeptShelf } from '../projection/kept-shelf.ts';
 import { readyQuery } from './ready-query.ts';
 import type { Tables } from './tables.ts';
 
@@ -8,9 +8,9 @@ const ofCellar = readyQuery((db, { cellar }: { readonly cellar: string }) =>
 );
 
 /** The shelves of a cellar's chemical store, by name. */
-export async function readShelves(db: Kysely<Tables>, cellar: string): Promise<readonly Shelf[]> {
+export async function readShelves(db: Kysely<Tables>, cellar: string): Promise<readonly KeptShelf[]> {
   const { rows } = await ofCellar(db, { cellar });
-  const shelves = rows.map(({ state }) => JSON.parse(state) as Shelf);
+  const shelves = rows.map(({ state }) => JSON.parse(state) as KeptShelf);
   return shelves.sort((one, other) => (one.shelf < other.shelf ? -1 : 1));
 }
 
@@ -18,7 +18,7 @@ export async function readShelves(db: Kysely<Tables>, cellar: string): Promise<r
 export async function keepShelves(
   db: Kysely<Tables>,
   cellar: string,
-  shelves: ReadonlyMap<string, Shelf | undefined>,
+  shelves: ReadonlyMap<string, KeptShelf | undefined>,
 ): Promise<void> {
   for (const [shelf, state] of shelves)
     if (state === undefined)

@@ -12,6 +12,7 @@ import {
   readNextEntry,
 } from './read-entries.ts';
 import { readVessel, readVessels } from './read-vessels.ts';
+import { shelfOf } from '../projection/kept-shelf.ts';
 import { readShelves } from './shelves.ts';
 import type { Tables } from './tables.ts';
 
@@ -38,7 +39,7 @@ export function createSqlView(db: Kysely<Tables>, { cellar, now, onRead }: SqlVi
     lastEntryBy: (person) => readLastEntryBy(looking(), cellar, person),
     vessel: (name) => readVessel(looking(), cellar, name),
     vessels: () => readVessels(looking(), cellar),
-    shelves: () => readShelves(looking(), cellar),
+    shelves: async () => (await readShelves(looking(), cellar)).map(shelfOf),
     person: (id) => readPerson(looking(), cellar, id),
     people: () => readPeople(looking(), cellar),
     kept: (key) => readKept(looking(), cellar, { key, now: now() }),
