@@ -9,6 +9,7 @@ import type { Line } from '../../replies/reply.ts';
 import type { Manner } from '../manner.ts';
 import type { Settings } from '../settings.ts';
 import { toDoseRequest } from '../to-requests.ts';
+import { apartFromLimit } from './apart-from-limit.ts';
 import { line, listLine, part } from './line.ts';
 import { limitFigure, ruleValues } from './rule.ts';
 import { vesselText } from './vessel.ts';
@@ -41,7 +42,7 @@ export function limitValues(reading: Reading, answer: Capped, manner: Manner): L
     unit: manner.unit,
     standing: limit !== undefined && now_mg_L > limit.limit_mg_L ? 'over' : 'at',
     now: numberText(now_mg_L, 1, manner.mark),
-    after: concentrationText(now_mg_L + (answer.dose_mg_L ?? 0), manner.mark),
+    after: apartFromLimit(now_mg_L + (answer.dose_mg_L ?? 0), limit?.limit_mg_L ?? 0, manner.mark),
   };
 }
 

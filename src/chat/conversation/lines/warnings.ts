@@ -4,6 +4,7 @@ import { numberText } from '../../replies/number-text.ts';
 import { concentrationText, molecularText } from '../../replies/quantity-text.ts';
 import type { Line } from '../../replies/reply.ts';
 import type { Manner } from '../manner.ts';
+import { apartFromLimit } from './apart-from-limit.ts';
 import { line } from './line.ts';
 import { rowOfRule, ruleValues } from './rule.ts';
 
@@ -103,7 +104,9 @@ export function allWarningLines(warnings: readonly Warning[], manner: Manner): L
 }
 
 function warningLine({ code, values }: Told, manner: Manner, room: Line['room']): Line {
-  const texts = Object.entries(values).map(([name, value]) => [name, textOf(name, value, manner)] as const);
+  const texts = Object.entries(values).map(
+    ([name, value]) => [name, besideLimit(name, values, manner) ?? textOf(name, value, manner)] as const,
+  );
   if (code === 'total-unknown' && totalMatters({ code, values }))
     return line(room, 'warning-total-unknown-half', {
       limit_mg_L: textOf('limit_mg_L', values['limit_mg_L'] ?? '', manner),
@@ -135,6 +138,17 @@ const byName = (texts: readonly (readonly [string, string])[]): Record<string, s
 /** A rule of the law by what it says and not by its id; of the label, and of additives, the market alone. */
 function lawValues({ rule }: Warning['values'], { mark }: Manner): Line['values'] {
   return typeof rule === 'string' && rowOfRule(rule) !== undefined ? ruleValues(rule, mark) : {};
+}
+
+/** A limit to its decimal, and what passes it by a hair never as the limit itself. */
+function besideLimit(name: string, values: Warning['values'], { mark }: Manner): string | undefined {
+  const { limit_mg_L: limit } = values;
+  const value = values[name];
+  if (typeof limit !== 'number' || typeof value !== 'number') return undefined;
+  if (name === 'limit_mg_L') return numberText(value, 1, mark);
+  return name.endsWith('_after_mg_L') && !name.includes('molecular')
+    ? apartFromLimit(value, limit, mark)
+    : undefined;
 }
 
 /** A warning's figure by its name: molecular SO2 to 0.01, concentrations to 1 or 0.1, the rest to 0.01. */
