@@ -1,6 +1,6 @@
 import { readFileSync } from 'node:fs';
 import type { Language } from '../chat/reader/understood.ts';
-import { LANGUAGES } from './languages.ts';
+import { LANGUAGES } from '../chat/reader/words/languages.ts';
 import type { LocaleSources } from '../chat/replies/say.ts';
 
 /** The sentences of every language, read from the folder `locales` beside `src`. Throws when a file is missing. */

@@ -4,7 +4,7 @@ import type { Content, IncomingMessage } from '../../src/chat/conversation/ports
 import { DEFAULT_SETTINGS, type Settings } from '../../src/chat/conversation/settings.ts';
 import { makeSay, type Said } from '../../src/chat/replies/say.ts';
 import { loadLocales } from '../../src/edge/locales.ts';
-import { isLanguage } from '../../src/edge/languages.ts';
+import { isLanguage } from '../../src/edge/is-language.ts';
 import type { AllowRule } from '../../src/edge/cellars/allow-rule.ts';
 import { makeDoor, type Door } from '../../src/edge/cellars/door.ts';
 import { createRateLimit } from '../../src/edge/cellars/rate-limit.ts';

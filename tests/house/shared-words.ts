@@ -26,17 +26,17 @@ const ACTS: readonly OwnWordId[] = [
   'remove', 'racked', 'moved', 'topped', 'emptied', 'acidified', 'language',
 ]; // prettier-ignore
 
-function byWord(language: Words['language'], lists: object): Map<string, Set<string>> {
+function byWord(list: Words, lists: object): Map<string, Set<string>> {
   const meanings = new Map<string, Set<string>>();
   for (const [id, entries] of Object.entries(lists) as [string, readonly string[]][])
-    for (const phrase of entries.flatMap((entry) => phrasesOf(entry, language)))
+    for (const phrase of entries.flatMap((entry) => phrasesOf(entry, list)))
       meanings.set(phrase, (meanings.get(phrase) ?? new Set()).add(id));
   return meanings;
 }
 
 /** Words of a language that stand for two things of one kind, or for two meanings that have to be apart. */
-export function shares({ language, says }: Words): string[] {
-  return [...byWord(language, says)].flatMap(([word, tags]) => {
+export function shares(list: Words): string[] {
+  return [...byWord(list, list.says)].flatMap(([word, tags]) => {
     const groups = [
       ...KINDS.map((kind) => [...tags].filter((tag) => tag.startsWith(kind))),
       ...APART.map((apart) => [...tags].filter((tag) => apart.includes(tag))),
@@ -46,8 +46,8 @@ export function shares({ language, says }: Words): string[] {
 }
 
 /** Words of a language that tell the bot to do two things. */
-export function ownShares({ language, own = {} }: Words): string[] {
-  return [...byWord(language, own)].flatMap(([word, ids]) => {
+export function ownShares(list: Words): string[] {
+  return [...byWord(list, list.own ?? {})].flatMap(([word, ids]) => {
     const acts = ACTS.filter((id) => ids.has(id));
     return acts.length > 1 ? [`${word}: ${acts.join(', ')}`] : [];
   });

@@ -1,5 +1,5 @@
 import type { FoldedText } from './fold-text.ts';
-import { elides, phrasesOf } from './spellings.ts';
+import { phrasesOf } from './spellings.ts';
 import { tellLanguages } from './tell-languages.ts';
 import type { Language } from './understood.ts';
 import { ALL_WORDS } from './words/all.ts';
@@ -73,9 +73,10 @@ function numbered(names: readonly Words['months'][]): ReadonlyMap<string, number
 function ownOf(lists: readonly Words[]): Map<string, OwnPhrase[]> {
   const index = new Map<string, OwnPhrase[]>();
   const known = new Map<string, { readonly phrase: OwnPhrase; readonly language: Language }>();
-  for (const { language, own = {} } of lists) {
+  for (const list of lists) {
+    const { language, own = {} } = list;
     for (const [id, entries] of Object.entries(own) as [OwnWordId, readonly string[]][]) {
-      for (const text of entries.flatMap((entry) => phrasesOf(entry, language))) {
+      for (const text of entries.flatMap((entry) => phrasesOf(entry, list))) {
         const before = known.get(text);
         if (before) {
           if (before.language === language && !before.phrase.ids.includes(id)) before.phrase.ids.push(id);
@@ -119,21 +120,22 @@ export function buildLexicon(lists: readonly Words[], { names = [], isTold = tru
     const words = cut < 0 ? 1 : phrase.split(' ').length;
     if (words > (longest.get(first) ?? 0)) longest.set(first, words);
   };
-  for (const { language, says } of lists) {
+  for (const list of lists) {
+    const { language, says } = list;
     for (const [tag, entries] of Object.entries(says) as [Tag, readonly string[]][])
-      for (const entry of entries)
-        for (const phrase of phrasesOf(entry, language)) add(phrase, tag, language);
+      for (const entry of entries) for (const phrase of phrasesOf(entry, list)) add(phrase, tag, language);
   }
   // English has all of it, with meanings of its own (`k`, `bar`).
   if (lists[0] !== undefined && lists[0].language !== 'en')
     for (const [tag, entries] of Object.entries(COMMON) as [Tag, readonly string[]][])
       for (const phrase of entries)
         if (phrases.get(phrase)?.of !== lists[0].language) add(phrase, tag, 'common');
-  for (const { language, says } of names) {
+  for (const list of names) {
+    const { says } = list;
     for (const [tag, entries] of Object.entries(says) as [Tag, readonly string[]][]) {
       if (!NAMES.test(tag)) continue;
       for (const entry of entries)
-        for (const phrase of phrasesOf(entry, language))
+        for (const phrase of phrasesOf(entry, list))
           if ((phrase.length >= SHORTEST_NAME || /\d/.test(phrase)) && !neverMended.has(phrase))
             add(phrase, tag, 'names');
     }
@@ -157,7 +159,7 @@ export function buildLexicon(lists: readonly Words[], { names = [], isTold = tru
   return {
     language: lists[0]?.language ?? 'en',
     isTold,
-    elides: lists.some(({ language }) => elides(language)),
+    elides: lists.some((list) => list.elides === true),
     phrases,
     longest,
     formulas,
@@ -172,9 +174,9 @@ export function buildLexicon(lists: readonly Words[], { names = [], isTold = tru
 
 /** `german`, `deutsch`, `de`, each also as another language calls it. */
 const LANGUAGES_BY_NAME: ReadonlyMap<string, Language> = new Map(
-  ALL_WORDS.flatMap(({ languages = {}, language: of }) =>
-    (Object.entries(languages) as [Language, readonly string[]][]).flatMap(([language, names]) =>
-      names.flatMap((name) => phrasesOf(name, of)).map((name): [string, Language] => [name, language]),
+  ALL_WORDS.flatMap((list) =>
+    (Object.entries(list.languages ?? {}) as [Language, readonly string[]][]).flatMap(([language, names]) =>
+      names.flatMap((name) => phrasesOf(name, list)).map((name): [string, Language] => [name, language]),
     ),
   ),
 );

@@ -2,11 +2,12 @@ import type { AdditiveId } from '../../core/additives/additive-id.ts';
 import type { FruitState } from '../../core/dose/must-ranges.ts';
 import type { Problem } from '../../core/problem.ts';
 import type { Command, SaidWhen } from './command.ts';
+import type { LANGUAGES } from './words/languages.ts';
 import type { SaidTitration } from './titration/said-titration.ts';
 import type { Category, Product, Stage, Style, Target } from '../../core/wine.ts';
 
 /** The languages of the message language, by their ISO 639-1 codes. */
-export type Language = 'en' | 'es' | 'fr' | 'it' | 'de' | 'pt';
+export type Language = (typeof LANGUAGES)[number];
 
 /** What a person wants. */
 export type Intent =
@@ -147,6 +148,11 @@ export interface Marks {
   fruitState?: FruitState;
   /** An amount stood per weight of fruit (`7 g per 100 kg`). */
   fruitRate?: true;
+  /** The wine is to be bottled. */
+  bottling?: true;
+  /** Oxygen at bottling, dissolved and in the headspace, mg/L; and mg of SO2 that one of it takes, where it is said. */
+  oxygen_mg_L?: number;
+  SO2_per_oxygen?: number;
   /** A cask without a usual size was named. */
   casksWithoutSize?: true;
   solutionUse?: 'holding' | 'cleaning' | 'make-up';

@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { LANGUAGES } from '../languages.ts';
+import { LANGUAGES } from '../../chat/reader/words/languages.ts';
 
 /** Names become part of an entry's key, which has a bound; control letters count as they are written there. */
 const LONGEST_NAME = 80;

@@ -4,7 +4,8 @@ import type { AdditiveId } from '../../core/additives/additive-id.ts';
 import { REGIONS } from '../../core/limits/region.ts';
 import { DEFAULT_SETTINGS, withUnits, type Settings } from '../../chat/conversation/settings.ts';
 import { OperatorError } from '../operator-error.ts';
-import { isLanguage, LANGUAGES } from '../languages.ts';
+import { LANGUAGES } from '../../chat/reader/words/languages.ts';
+import { isLanguage } from '../is-language.ts';
 import type { KeptPart } from './kept-lines.ts';
 
 /** What the command line asks for. */

@@ -1,5 +1,5 @@
 import type { Language } from '../../chat/reader/understood.ts';
-import { isLanguage } from '../languages.ts';
+import { isLanguage } from '../is-language.ts';
 
 /** The language of a phone's IETF tag (`pt-BR` → `pt`); English when it is none of ours, or unknown. */
 export function languageOf(tag: string | undefined): Language {

@@ -4,6 +4,7 @@ import type { Words } from './words.ts';
 export const de: Words = {
   language: 'de',
   groups: '.',
+  umlauts: true,
   says: {
     'unit:L': ['liter', 'litern', 'ltr'],
     'unit:mL': ['milliliter', 'millilitern'],

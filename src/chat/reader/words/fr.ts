@@ -4,6 +4,7 @@ import type { Words } from './words.ts';
 export const fr: Words = {
   language: 'fr',
   groups: '',
+  elides: true,
   says: {
     'unit:L': ['litre', 'litres', 'ltr'],
     'unit:mL': ['millilitre', 'millilitres'],

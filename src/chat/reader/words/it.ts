@@ -4,6 +4,7 @@ import type { Words } from './words.ts';
 export const it: Words = {
   language: 'it',
   groups: '.',
+  elides: true,
   says: {
     'unit:L': ['litro', 'litri', 'ltr'],
     'unit:mL': ['millilitro', 'millilitri'],

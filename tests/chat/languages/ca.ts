@@ -1,0 +1,42 @@
+import type { Language } from '../../../src/chat/reader/understood.ts';
+import type { Words } from '../../../src/chat/reader/words/words.ts';
+
+/** A few words of Catalan: a seventh language, as somebody might begin to add it. */
+export const ca: Words = {
+  language: 'ca' as Language,
+  groups: '.',
+  elides: true,
+  says: {
+    'unit:L': ['litre', 'litres'],
+    'unit:hL': ['hectolitre', 'hectolitres'],
+    'label:free': ['lliure', 'so2 lliure'],
+    'label:total': ['total'],
+    'cue:target': ['objectiu', 'pujar a', 'fins a'],
+    'cue:to': ['a'],
+    'cue:also-at': ['a'],
+    'cue:from-too': ['de'],
+    'cue:raise': ['pujar', 'augmentar'],
+    'cue:add': ['afegir', 'afegeix'],
+    'cue:past': ['afegit', 'afegits', 'he afegit', 'hem afegit'],
+    'cue:not': ['no', 'encara no', 'sense'],
+    'cue:if': ['si'],
+    'cue:in': ['a', 'al', 'en'],
+    'cue:of': ['de', "d'", 'del'],
+    'cue:article': ['el', 'la', "l'", 'un', 'una'],
+    'cue:binds': ['es combina'],
+    'cue:third': ['un terç'],
+    'cue:plain': ['el', 'la', "l'", 'de', "d'", 'del', 'al', 'he', 'hem', 'és', 'i', 'amb', 'vi', 'mg'],
+    'cue:greeting': ['bon dia', 'hola'],
+    'cue:thanks': ['gràcies', 'merci'],
+    'vessel:tank': ['dipòsit', 'dipòsits', 'tina', 'cup'],
+    'vessel:barrel': ['bóta', 'bótes'],
+    'style:red': ['negre', 'vi negre'],
+    'style:white': ['blanc', 'vi blanc'],
+    'stage:must': ['most', 'mosts'],
+    'additive:potassium-metabisulfite': ['metabisulfit', 'metabisulfit potàssic', 'meta'],
+    'additive:none': ['bentonita', 'àcid tartàric'],
+  },
+  own: { filler: ['si us plau', 'gràcies'], vessels: ['dipòsits'], language: ['idioma', 'llengua'] },
+  languages: { ['ca' as Language]: ['català', 'ca'] },
+  danger: { down: ["s'ha desmaiat", 'inconscient'], person: ['algú', 'company'] },
+};
