@@ -347,6 +347,16 @@ ways-out = Or: colder, cleaner, checked more often; acid for a lower pH: ask som
 
 ## The stage
 
+bottling-no-oxygen = No oxygen is counted. Measure it, dissolved and headspace, and write it behind: oxygen 2 mg/L
+bottling-takes = { $oxygen } mg/L oxygen can take { $loss } { $unit } of it ({ bottling-each }).
+bottling-target = { $after } free at bottling, so { $now } now: { $oxygen } mg/L oxygen can take { $loss } { $unit } ({ bottling-each }).
+bottling-each =
+    { $each ->
+        [formula] 4 for 1, by formula
+       *[other] { $each } for 1, as you say
+    }
+bottling-measured = Measured in trade figures (not confirmed) it is { $each } for 1: then { bare-amount } would do. To reckon so: oxygen { $oxygen } mg/L at { $each }
+bottling-measured-none = Measured in trade figures (not confirmed) it is { $each } for 1: then nothing is needed. To reckon so: oxygen { $oxygen } mg/L at { $each }
 condition-stage = Only if malolactic is finished or not wanted.
 condition-red =
     { $kind ->
@@ -743,8 +753,7 @@ warning-total-near-limit =
        *[at-least] ⚠ Total would be at least { $total_after_mg_L } { $unit }, near the limit { $limit_mg_L } ({ rule-short }{ limit-doubt }){ law-decides }.
     }
 warning-total-unknown = ⚠ The total is unknown: measure it.
-warning-total-unknown-half = ⚠ The total is unknown: measure it, free alone comes over half of the { $limit_mg_L } { $unit } limit.
-warning-total-unknown-most = ⚠ Total unknown: for this dose it may be { $most_total_mg_L } { $unit } at most today, limit { $limit_mg_L } ({ rule-short }). Measure it.
+warning-total-unknown-most = ⚠ Total unknown, measure it: for this dose it may be { $most_total_mg_L } { $unit } at most today, limit { $limit_mg_L } ({ rule-short }){ law-decides }.
 warning-no-limit-on-file =
     { $region ->
         [oiv] ⚠ I know no limit for such wine: look up your country’s law.
@@ -765,6 +774,13 @@ warning-basis-fallback-change = ⚠ The OIV basis needs alcohol, and 20–40 °C
     [more] more.
    *[less] less.
 }
+warning-malolactic-may-not-start =
+    { $above ->
+        [free] ⚠ Free { $free_mg_L } is above { $free_ceiling_high_mg_L } { $unit }: malolactic may not start (AWRI, for pH 3.3–3.5).
+        [total] ⚠ Total { $total_mg_L } is above { $total_ceiling_high_mg_L } { $unit }: malolactic may not start (AWRI, for pH 3.3–3.5).
+       *[both] ⚠ Free { $free_mg_L } is above { $free_ceiling_high_mg_L }, total { $total_mg_L } above { $total_ceiling_high_mg_L } { $unit }: malolactic may not start (AWRI, for pH 3.3–3.5).
+    }
+warning-restart-may-fail = ⚠ { $molecular_mg_L } { $unit } molecular holds yeast back: from { $held_back_molecular_mg_L } a restart may fail (common practice, no source).
 warning-must-may-hinder-malolactic = ⚠ Above { $malolactic_unharmed_mg_L } { $unit } in the must malolactic may be hindered (AWRI).
 warning-rounding-coarse = ⚠ What a scale shows is off by { $rounding_mg_L } { $unit } here: use a finer one, or a stock.
 warning-already-dosed = ⚠ It was dosed lately.
@@ -1002,7 +1018,7 @@ step-mass-by-rate = Additive, rate × volume ÷ 1000:
 step-free-after = Free after, if nothing binds:
 step-molecular-after = Molecular after, free ÷ (10^(pH − pK) + 1):
 step-salt-mass = Salt, grams in 0.1 L ÷ 0.1 L × volume:
-step-added-by-one-mL = One mL in a barrel, SO2 in it ÷ volume of the barrel:
+step-added-by-one-millilitre = One mL in a barrel, SO2 in it ÷ volume of the barrel:
 step-stock-for-a-barrel = Stock for a barrel, rise × volume of the barrel ÷ SO2 in the stock:
 step-salt-by-recipe = Sulfite, grams in a litre × volume:
 step-citric-acid-by-recipe = Citric acid, grams in a litre × volume:
@@ -1521,11 +1537,13 @@ vessel-order = Open order { $entry }: { $list } ({ $who }, { $when }).
 vessel-check =
     Next check { $when }{ $why ->
         [landing] { " " }(after the addition)
+        [forecast] { " " }(its readings say it may fall short then)
        *[other] { "" }
     }.
 vessel-check-due =
     Check due since { $when }{ $why ->
         [landing] { " " }(after the addition)
+        [forecast] { " " }(its readings say it may fall short)
        *[other] { "" }
     }.
 vessel-unwatched = No checks. Again: watch { $vessel }
@@ -1559,6 +1577,11 @@ due-often =
         [low] , low
        *[none] { "" }
     }{ due-overdue }{ due-stage }
+due-forecast =
+    { $vessel }: { $free ->
+        [none] never measured
+       *[other] free { $free } on { $day }
+    }, may fall short by now{ due-overdue }{ due-stage }
 daily-head = Good morning.
 remind = A day ago: { $list }. Measure free SO2 now.
 open-none = No open orders.

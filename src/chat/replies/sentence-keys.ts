@@ -71,6 +71,12 @@ export interface SentenceValues {
   'blend-nobody': 'count' | 'vessel';
   'blend-share': 'enough' | 'held' | 'least' | 'most' | 'other' | 'vessel' | 'volume';
   'blend-whole': 'free' | 'total' | 'volume';
+  'bottling-each': 'each';
+  'bottling-measured': 'amount' | 'count' | 'each' | 'oxygen' | 'unit';
+  'bottling-measured-none': 'each' | 'oxygen';
+  'bottling-no-oxygen': never;
+  'bottling-takes': 'each' | 'loss' | 'oxygen' | 'unit';
+  'bottling-target': 'after' | 'each' | 'loss' | 'now' | 'oxygen' | 'unit';
   'burning-sulfur-danger': never;
   'burning-sulfur-never': never;
   'burning-sulfur-rather': never;
@@ -209,6 +215,7 @@ export interface SentenceValues {
   'dosed-sampled-before': 'known' | 'list' | 'next' | 'vessel' | 'when' | 'who';
   'dosed-which-first': 'known' | 'list' | 'vessel' | 'when' | 'who';
   'dosed-who': 'who';
+  'due-forecast': 'day' | 'days' | 'free' | 'overdue' | 'stage' | 'vessel';
   'due-head': 'count' | 'number';
   'due-landing': 'added' | 'days' | 'overdue' | 'stage' | 'vessel';
   'due-none': never;
@@ -878,7 +885,7 @@ export interface SentenceValues {
   'solution-weigh': 'additive' | 'amount' | 'volume';
   'stage-now': 'stage';
   'stage-word': 'stage';
-  'step-added-by-one-mL': never;
+  'step-added-by-one-millilitre': never;
   'step-added-by-rate': never;
   'step-added-concentration': never;
   'step-addition': never;
@@ -1024,11 +1031,14 @@ export interface SentenceValues {
     'comparator' | 'confidence' | 'counts' | 'region' | 'threshold_mg_L' | 'total_after_mg_L' | 'unit_of_law';
   'warning-limit-unconfirmed':
     'band' | 'class' | 'high' | 'limit_mg_L' | 'low' | 'of' | 'organic' | 'region' | 'unit' | 'what';
+  'warning-malolactic-may-not-start':
+    'above' | 'free_ceiling_high_mg_L' | 'free_mg_L' | 'total_ceiling_high_mg_L' | 'total_mg_L' | 'unit';
   'warning-molecular-above-2': 'unit';
   'warning-must-may-hinder-malolactic': 'malolactic_unharmed_mg_L' | 'unit';
   'warning-no-dose-at-this-stage': 'stage';
   'warning-no-limit-on-file': 'region';
   'warning-ph-unusual': 'ph';
+  'warning-restart-may-fail': 'held_back_molecular_mg_L' | 'molecular_mg_L' | 'unit';
   'warning-rounding-coarse': 'rounding_mg_L' | 'unit';
   'warning-sodium': 'region';
   'warning-stage-not-over': 'stage';
@@ -1037,7 +1047,6 @@ export interface SentenceValues {
   'warning-total-over-limit':
     'band' | 'class' | 'confidence' | 'high' | 'limit_mg_L' | 'low' | 'organic' | 'region' | 'total' | 'total_after_mg_L' | 'unit' | 'what';
   'warning-total-unknown': never;
-  'warning-total-unknown-half': 'limit_mg_L' | 'unit';
   'warning-total-unknown-most':
     'band' | 'class' | 'high' | 'limit_mg_L' | 'low' | 'most_total_mg_L' | 'organic' | 'region' | 'unit' | 'what';
   'ways-out': never;

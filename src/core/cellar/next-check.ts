@@ -1,14 +1,15 @@
 import type { Stage } from '../wine.ts';
 import { DAY_ms, HOUR_ms } from '../time/durations.ts';
 import { LOW_FREE_mg_L, type CheckSettings } from './check-settings.ts';
+import { forecastOf } from './forecast-of.ts';
 import { isBarrel } from './is-barrel.ts';
 import { UNFINISHED_STAGES, type Vessel } from './vessel.ts';
 
 /** When free SO2 should be measured next, in milliseconds since 1970, and why. */
 export interface NextCheck {
   readonly at: number;
-  /** To see where an addition landed; or so long after the last reading, as usual or more often. */
-  readonly why: 'landing' | 'usual' | 'often';
+  /** To see where an addition landed; so long after the last reading, as usual or more often; or where it may fall short. */
+  readonly why: 'landing' | 'usual' | 'often' | 'forecast';
   /** Whether the last reading showed less than 10 mg/L of free SO2 in a wine that should have it. */
   readonly is_low: boolean;
   /** False while the fermentations are not over: it may be measured, and no dose is urged. */
@@ -21,7 +22,8 @@ const STAGES_WITHOUT_CHECKS: readonly Stage[] = ['must', 'fermenting'];
 /**
  * When a vessel should be measured next; undefined where nothing is due of it ever: it is empty, bottled or not
  * watched. An addition that has not landed comes before everything else, and of several the last one counts, as one
- * reading answers for all. `later` only postpones.
+ * reading answers for all. Where three readings say when free SO2 may fall short, it is measured then, if that is sooner
+ * than usual. `later` only postpones.
  *
  * Range: hours and days of the settings above 0; free SO2 in mg/L. Source: common practice, no source; every two
  * weeks for barrels and below 10 mg/L are own choices.
@@ -51,7 +53,23 @@ export function nextCheck(vessel: Vessel, settings: CheckSettings): NextCheck | 
   }
   const why = is_low || isBarrel(vessel.vessel) ? 'often' : 'usual';
   const days = why === 'often' ? settings.often_days : settings.usual_days;
-  return { at: Math.max(unmeasuredSince(vessel) + days * DAY_ms, later), why, is_low, urges_dose };
+  const usual = unmeasuredSince(vessel) + days * DAY_ms;
+  const short = urges_dose ? shortFrom(vessel, settings) : undefined;
+  if (short !== undefined && short < usual)
+    return { at: Math.max(short, later), why: 'forecast', is_low, urges_dose };
+  return { at: Math.max(usual, later), why, is_low, urges_dose };
+}
+
+/** A forecast calls for no second reading sooner than this, days (own choice). */
+const SOONEST_days = 3;
+
+/** The earliest that free SO2 may fall below what the wine needs, by its own readings; never right after a reading. */
+function shortFrom(vessel: Vessel, { neededOf }: CheckSettings): number | undefined {
+  const needed_mg_L = neededOf?.(vessel);
+  if (needed_mg_L === undefined || vessel.free_mg_L === undefined) return undefined;
+  const found = forecastOf(vessel, needed_mg_L);
+  if (found.by !== 'readings') return undefined;
+  return Math.max(found.from, vessel.free_mg_L.at + SOONEST_days * DAY_ms);
 }
 
 /** When the last addition went in that no reading has shown yet. */

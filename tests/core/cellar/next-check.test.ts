@@ -171,3 +171,32 @@ test('a reminder comes exactly 24 hours after the addition, when the clock shows
   expect(isoWithZone(reminderAt(evening), 'Europe/Madrid')).toBe('2026-10-25T20:05:00+01:00');
   expect(reminderAt(evening) - evening).toBe(24 * HOUR);
 });
+
+test('where its own readings say that it may fall short sooner, it is measured then; never later than usual', () => {
+  const readings = [0, 7, 14, 21].map((day, index) => ({
+    entry: 20 + index,
+    at: START + day * DAY,
+    free_mg_L: 40 * Math.exp(-0.012 * day),
+  }));
+  const last = readings.at(-1)?.free_mg_L ?? 0;
+  const wine = vessel('tank 4', { readings, ...free(last, 21) });
+  const by = (needed: number) => nextCheck(wine, { ...CHECK_DEFAULTS, neededOf: () => needed });
+  expect(by(27)).toMatchObject({ why: 'forecast' });
+  expect(by(27)?.at).toBeLessThan(START + 51 * DAY);
+  expect(by(27)?.at).toBeGreaterThanOrEqual(START + 24 * DAY);
+  expect(by(5)).toMatchObject({ why: 'usual', at: START + 51 * DAY });
+  expect(nextCheck(wine, CHECK_DEFAULTS)).toMatchObject({ why: 'usual', at: START + 51 * DAY });
+  expect(nextCheck({ ...wine, later: START + 60 * DAY }, { ...CHECK_DEFAULTS, neededOf: () => 27 })?.at).toBe(
+    START + 60 * DAY,
+  );
+});
+
+test('two readings, or a wine that has enough of a rise, call for no sooner check', () => {
+  const two = [0, 14].map((day, index) => ({
+    entry: 20 + index,
+    at: START + day * DAY,
+    free_mg_L: 40 - day,
+  }));
+  const wine = vessel('tank 4', { readings: two, ...free(26, 14) });
+  expect(nextCheck(wine, { ...CHECK_DEFAULTS, neededOf: () => 20 })?.why).toBe('usual');
+});
