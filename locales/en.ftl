@@ -871,6 +871,7 @@ help-stock-4 = stock kmbs 3.2 kg → counted on the shelf: holds from then on
 help-stock-5 = used 200 g kmbs for rinsing → for no wine
 help-stock-6 = discarded 1 kg kmbs because caked → thrown away
 help-stock-7 = added 82 g kmbs T4 lot 4471 → from that lot; else the oldest
+help-stock-8 = export stock → receipts, suppliers, lots and what was left, for the books
 help-log-1 = Nothing is deleted; corrections stand beside what they correct.
 help-log-2 = added 82 g kmbs T4 → noted; also ppm, mL, yesterday 17:00, lot 4471, note: …
 help-log-3 = T4 now free 28 total 96 → a reading kept, without a dose

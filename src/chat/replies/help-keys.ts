@@ -9,7 +9,7 @@ export const HELP_KEYS: Readonly<Record<string, readonly SentenceKey[]>> = {
   solutions: ['help-solutions-1', 'help-solutions-2', 'help-solutions-3', 'help-solutions-4', 'help-solutions-5', 'help-solutions-6', 'help-solutions-7'],
   law: ['help-law-1', 'help-law-2', 'help-law-3', 'help-law-4', 'help-law-5', 'help-law-6', 'help-law-7', 'help-law-8', 'help-law-9'],
   round: ['help-round-1', 'help-round-2', 'help-round-3', 'help-round-4', 'help-round-5', 'help-round-6', 'help-round-7', 'help-round-8'],
-  stock: ['help-stock-1', 'help-stock-2', 'help-stock-3', 'help-stock-4', 'help-stock-5', 'help-stock-6', 'help-stock-7'],
+  stock: ['help-stock-1', 'help-stock-2', 'help-stock-3', 'help-stock-4', 'help-stock-5', 'help-stock-6', 'help-stock-7', 'help-stock-8'],
   log: ['help-log-1', 'help-log-2', 'help-log-3', 'help-log-4', 'help-log-5', 'help-log-6', 'help-log-7', 'help-log-8'],
   vessels: ['help-vessels-1', 'help-vessels-2', 'help-vessels-3', 'help-vessels-4', 'help-vessels-5', 'help-vessels-6', 'help-vessels-7', 'help-vessels-8', 'help-vessels-9', 'help-vessels-10'],
   reminders: ['help-reminders-1', 'help-reminders-2', 'help-reminders-3', 'help-reminders-4', 'help-reminders-5', 'help-reminders-6'],

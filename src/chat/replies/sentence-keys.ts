@@ -468,6 +468,7 @@ export interface SentenceValues {
   'help-stock-5': never;
   'help-stock-6': never;
   'help-stock-7': never;
+  'help-stock-8': never;
   'help-topic': 'topic';
   'help-vessels-1': never;
   'help-vessels-10': never;
