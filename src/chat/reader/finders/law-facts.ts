@@ -52,7 +52,8 @@ function findDensity(board: Board, i: number): void {
   const at = figureBehind(board, i);
   if (at === undefined) return;
   const { value } = decimalAt(board, at);
-  if (Number.isInteger(value) || value < DENSITY.min || value > DENSITY.max) return;
+  const hasDecimals = /[.,']/.test(termAt(board, at).text);
+  if (!hasDecimals || value < DENSITY.min || value > DENSITY.max) return;
   find(board, 'density_kg_L', value, 'labelled', i, densityUnitEnd(board, at));
 }
 
