@@ -26,7 +26,7 @@ export interface Unasked {
 export type ServeDue = (
   due: TakenDue,
   now: number,
-  also?: (unasked: Unasked) => readonly Write[],
+  also?: (unasked: Unasked, writes: readonly Write[]) => readonly Write[],
 ) => Promise<Unasked>;
 
 /** Makes the serving of due things. */
@@ -41,7 +41,7 @@ export function makeServeDue({ say, store, settings, door }: ServingDue): ServeD
       if ((await view.due(due.id)) === undefined) return { writes: [], result: { chat, said: [] } };
       const { writes, replies } = await handleDue({ cellar, due, at: now, ...where }, view, settings);
       const result: Unasked = { chat, said: replies.map(say) };
-      return { writes: also === undefined ? writes : [...writes, ...also(result)], result };
+      return { writes: also === undefined ? writes : [...writes, ...also(result, writes)], result };
     });
   };
 }

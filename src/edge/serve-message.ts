@@ -36,11 +36,11 @@ export type Serve = (message: IncomingMessage) => Promise<Served>;
 
 /**
  * Serves a message in a turn, and rejects where that fails: then nothing of it is kept. `also` gives what the turn
- * writes besides, made of what is said.
+ * writes besides, made of what is said and of what it writes.
  */
 export type ServeTurn = (
   message: IncomingMessage,
-  also?: (served: Served) => readonly Write[],
+  also?: (served: Served, writes: readonly Write[]) => readonly Write[],
 ) => Promise<Served>;
 
 /** So often a message is handled at most until it could be read. */
@@ -70,7 +70,7 @@ export function makeServeTurn(serving: Omit<Serving, 'report'>): ServeTurn {
           ...(round && { round }),
           ...(errand && { errand, message }),
         };
-        return { writes: also === undefined ? writes : [...writes, ...also(result)], result };
+        return { writes: also === undefined ? writes : [...writes, ...also(result, writes)], result };
       });
       if (served !== undefined) return served;
     }

@@ -12,11 +12,13 @@ import { NO_METER, type Meter } from '../http/meter.ts';
 import type { Log } from '../logging.ts';
 import type { ServeTurn } from '../serve-message.ts';
 import { StoreError } from '../store/store-error.ts';
+import { makeTakeTurns } from '../store/take-turns.ts';
 import type { Arrival } from './arrival.ts';
 import type { CarryFiles } from './carry-files.ts';
 import { CHANNEL } from './channel.ts';
 import type { Handling } from './inbox.ts';
 import { toPosts } from './to-posts.ts';
+import { noteTopics } from './topics.ts';
 
 /** What answering needs. */
 export interface AnswerOptions {
@@ -30,6 +32,8 @@ export interface AnswerOptions {
   /** Sends past the store, where that one fails. One try; never rejects. */
   readonly sendNow: (posts: readonly Post[]) => Promise<void>;
   readonly files: CarryFiles;
+  /** Whether the bot serves this chat; absent: it serves any. */
+  readonly isAdmitted?: (message: IncomingMessage) => Promise<boolean>;
   /** Ends the waiting mark on a tapped button. Never rejects. */
   readonly tellTapSeen: (tapId: string) => Promise<void>;
   readonly meter?: Meter;
@@ -64,13 +68,15 @@ export function makeHandling(options: AnswerOptions): Handling {
     clock,
     log,
     signal,
+    isAdmitted = async () => true,
     meter = NO_METER,
   } = options;
+  const errandTurns = makeTakeTurns();
+  const errands = new Set<Promise<void>>();
 
   const answer = async (arrival: Arrival): Promise<void> => {
     if (arrival.tapId !== undefined) void tellTapSeen(arrival.tapId);
-    if (arrival.isJoin && (await arrival.isKept) === false) return;
-    if (arrival.isJoin) return end([arrival], [say(joinReply(arrival.message.language))]);
+    if (arrival.isJoin) return greetGroup(arrival);
     const begun = performance.now();
     let failure: unknown;
     for (const wait_ms of [0, ...TRY_WAITS_MS]) {
@@ -83,14 +89,15 @@ export function makeHandling(options: AnswerOptions): Handling {
           answers,
           errand,
           message: handledIn,
-        } = await serve(message, (served) => {
+        } = await serve(message, (served, writes) => {
           posts = toPosts(served.said, { spot: arrival, to: message.id, now: clock.now() });
           // With an errand it is handled when that is done: should the process end before, it is done once more.
-          return [...(served.errand === undefined ? [handled(arrival)] : []), ...posts.map(writePost)];
+          const ended = served.errand === undefined ? [handled(arrival)] : [];
+          return [...ended, ...posts.map(writePost), ...noteTopics(arrival, writes)];
         });
         send(posts);
         audit?.(answers);
-        if (errand !== undefined) return await runErrand(arrival, errand, handledIn ?? message);
+        if (errand !== undefined) return startErrand(arrival, errand, handledIn ?? message);
         return meter.handled('answered', (performance.now() - begun) / 1000);
       } catch (error) {
         failure = error;
@@ -99,6 +106,21 @@ export function makeHandling(options: AnswerOptions): Handling {
       }
     }
     await putAside(arrival, failure);
+  };
+
+  const greetGroup = async (arrival: Arrival): Promise<void> => {
+    const { message, isKept } = arrival;
+    if ((await isKept) === false) return;
+    // Among strangers nothing is said.
+    const isWelcome = await isAdmitted(message).catch(() => false);
+    await end([arrival], isWelcome ? [say(joinReply(message.language))] : []);
+  };
+
+  /** One errand of a chat after the other, while what is said there goes on being answered. */
+  const startErrand = (arrival: Arrival, errand: Errand, message: IncomingMessage): void => {
+    const done = errandTurns(String(arrival.chatId), () => runErrand(arrival, errand, message));
+    errands.add(done);
+    void done.finally(() => errands.delete(done));
   };
 
   /** Off the turn, as it takes long. At a stop it is left, and done anew by the next process. */
@@ -154,7 +176,7 @@ export function makeHandling(options: AnswerOptions): Handling {
     }
   };
 
-  return { answer, leave, putAside };
+  return { answer, leave, putAside, idle: async () => void (await Promise.all(errands)) };
 }
 
 const isForUs = ({ message, isJoin }: Arrival): boolean => message.addressed !== 'overheard' && !isJoin;

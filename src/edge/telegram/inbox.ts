@@ -30,6 +30,8 @@ export interface Handling {
   readonly leave: (arrivals: readonly [Arrival, ...Arrival[]]) => Promise<void>;
   /** Puts aside what cannot be answered. */
   readonly putAside: (arrival: Arrival, cause: unknown) => Promise<void>;
+  /** Resolves when the errands of what was answered are done, or when there is no time left. */
+  readonly idle: () => Promise<void>;
 }
 
 /** Keeps what arrives until it is handled: in order within a chat, side by side across chats. */
@@ -73,7 +75,7 @@ export function createInbox(options: InboxOptions): Inbox {
   const handleAlone = async (arrival: Arrival, { number, tries }: Waiting): Promise<void> => {
     await store.countTry(CHANNEL, [number]);
     if (isStale(arrival)) await handling.leave([arrival]);
-    else if (tries < MOST_TRIES) await handling.answer(arrival);
+    else if (tries < MOST_TRIES) await handling.answer(arrival).then(handling.idle);
     else await handling.putAside(arrival, new Error('the process ended while this was in hand'));
   };
 
@@ -128,7 +130,7 @@ export function createInbox(options: InboxOptions): Inbox {
     },
     count: queues.count,
     depth: queues.depth,
-    idle: () => queues.idle(),
+    idle: () => queues.idle().then(handling.idle),
   };
 }
 

@@ -41,7 +41,7 @@ const MOST_UNSENT = 5000;
 
 /** Joins what arrives to its answer, and the answer to what is sent. */
 export function joinMail(options: MailOptions): Mail {
-  const { platform, log, signal, migrateChat } = options;
+  const { platform, log, signal, migrateChat, fileWork } = options;
   const sending = { api: platform.sends, receipts: createReceipts(), signal };
   const move = async (from: number, to: number): Promise<void> =>
     migrateChat?.(chatNameOf(from), chatNameOf(to));
@@ -60,7 +60,8 @@ export function joinMail(options: MailOptions): Mail {
     sendNow: async (posts) => {
       for (const post of posts) await sendPost(post, sending);
     },
-    files: makeCarryFiles(options),
+    files: makeCarryFiles({ ...options, pass: outbox.pass }),
+    ...(fileWork !== undefined && { isAdmitted: fileWork.isAdmitted }),
     tellTapSeen: makeTellTapSeen({ api: platform.calls, log, signal }),
   });
   const answerTyped = makeAnswerTyped(options);

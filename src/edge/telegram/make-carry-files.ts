@@ -10,7 +10,7 @@ import type { Arrival } from './arrival.ts';
 import type { CarryFiles } from './carry-files.ts';
 import { fetchFile } from './fetch-file.ts';
 import type { Platform } from './platform.ts';
-import { LONGEST_CAPTION, sendFile } from './send-file.ts';
+import { LONGEST_CAPTION, sendFile, type FileSending } from './send-file.ts';
 import { whileTyping, type Doing } from './while-typing.ts';
 
 /** What has to do with files, as the program joins it. */
@@ -31,6 +31,7 @@ export interface CarryOptions {
   readonly config: { readonly botToken: string; readonly botApiRoot: string };
   readonly clock: Clock;
   readonly log: Log;
+  readonly pass: FileSending['pass'];
   readonly signal: AbortSignal;
 }
 

@@ -4,7 +4,7 @@ import type { Log } from '../logging.ts';
 import { NO_METER, type Depth, type Meter } from '../http/meter.ts';
 import { CHANNEL } from './channel.ts';
 import { mergePosts, type Parcel } from './merge-posts.ts';
-import { createGate, createWindow, type Limits, type Window } from './pace.ts';
+import { createGate, createWindow, type Limits, type Passed, type Window } from './pace.ts';
 import type { Sent } from './send-post.ts';
 import { makeSettleTogether } from './settle-together.ts';
 import { createSlowDowns } from './slow-downs.ts';
@@ -27,6 +27,8 @@ export interface OutboxOptions {
 export interface Outbox {
   /** Takes posts that the store keeps. */
   readonly add: (posts: readonly Post[]) => void;
+  /** Resolves when something that is no post, as a file, may be sent to a chat. */
+  readonly pass: (chat: string) => Promise<Passed>;
   readonly count: () => number;
   readonly depth: () => Depth;
   /** Resolves when nothing waits, or when there is no time left. */
@@ -71,24 +73,33 @@ export function createOutbox(options: OutboxOptions): Outbox {
   };
 
   /** Waits until the chat may get something; tells whether it had to. */
-  const waitForChat = async (lane: Lane): Promise<boolean> => {
+  const waitForChat = async (lane: Pick<Lane, 'chat' | 'notBefore'>): Promise<boolean> => {
     const opensAt = Math.max(windowOf(lane.chat).opensAt(clock.now()), lane.notBefore);
     const wait_ms = opensAt - clock.now();
     if (wait_ms > 0) await clock.wait(wait_ms, signal);
     return wait_ms > 0;
   };
 
+  const passGate = async (chat: string): Promise<Passed> => {
+    const passed = await gate.pass(signal);
+    const inChat = windowOf(chat).note(clock.now());
+    return {
+      arrived: () => {
+        passed.arrived();
+        inChat.arrived(clock.now());
+      },
+    };
+  };
+
   const run = async (lane: Lane): Promise<void> => {
     for (;;) {
       const waited = await waitForChat(lane);
-      const passed = await gate.pass(signal);
+      const passed = await passGate(lane.chat);
       const [first] = lane.posts;
       if (first === undefined || signal.aborted) break;
       const parcel = waited ? mergePosts(first, lane.posts) : { posts: [first], body: first.body };
-      const inChat = windowOf(lane.chat).note(clock.now());
       const sent = await send({ chat: lane.chat, body: parcel.body });
       passed.arrived();
-      inChat.arrived(clock.now());
       if (sent.kind === 'sent') meter.sent();
       else if (!signal.aborted) meter.refused(sent.kind);
       await react(lane, parcel, sent);
@@ -177,6 +188,11 @@ export function createOutbox(options: OutboxOptions): Outbox {
 
   return {
     add,
+    pass: async (chat) => {
+      while (await waitForChat({ chat, notBefore: lanes.get(chat)?.notBefore ?? -Infinity }))
+        if (signal.aborted) break;
+      return passGate(chat);
+    },
     count: () => count,
     depth: () => {
       const firsts = [...lanes.values()].flatMap(({ posts: [first] }) =>

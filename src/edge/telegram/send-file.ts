@@ -5,6 +5,7 @@ import type { Clock } from '../clock.ts';
 import type { Log } from '../logging.ts';
 import type { Spot } from './arrival.ts';
 import { failureOf } from './failure.ts';
+import type { Passed } from './pace.ts';
 import { clientSignal } from './platform.ts';
 import { judgeSending, type Sent } from './send-post.ts';
 import { whereOf } from './to-posts.ts';
@@ -14,6 +15,8 @@ export interface FileSending {
   readonly api: Api;
   readonly clock: Clock;
   readonly log: Log;
+  /** Resolves when something may be sent to a chat. */
+  readonly pass: (chat: string) => Promise<Passed>;
   readonly signal: AbortSignal;
 }
 
@@ -29,7 +32,7 @@ const WAITS_S = [1, 2, 4, 8, 15] as const;
  */
 export async function sendFile(
   { file, spot, caption }: { readonly file: BroughtFile; readonly spot: Spot; readonly caption?: string },
-  { api, clock, log, signal }: FileSending,
+  { api, clock, log, pass, signal }: FileSending,
 ): Promise<boolean> {
   let chat = spot.chatId;
   for (const wait_s of [...WAITS_S, undefined]) {
@@ -39,12 +42,14 @@ export async function sendFile(
       ...whereOf(spot, true),
     };
     let sent: Sent = { kind: 'sent' };
+    const passed = await pass(String(chat));
     try {
       if (file.isPicture) await api.sendPhoto(chat, upload, others, clientSignal(signal));
       else await api.sendDocument(chat, upload, others, clientSignal(signal));
     } catch (error) {
       sent = judgeSending(failureOf(error));
     }
+    passed.arrived();
     if (sent.kind === 'sent' || sent.kind === 'closed') return true;
     if (sent.kind === 'moved') chat = Number(sent.chat);
     else log.warn({ sent }, 'a file could not be sent yet');

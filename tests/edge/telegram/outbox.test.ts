@@ -134,6 +134,17 @@ describe('what is to be sent', () => {
 });
 
 describe('the limits of the platform', () => {
+  test('count a file with the messages of its chat', async () => {
+    const { outbox, send, left } = stage({ limits: USUAL_LIMITS });
+    for (let file = 0; file < 3; file += 1) (await outbox.pass('1')).arrived();
+    await send(post('a', '1', BUTTONS), post('b', '2'));
+    const [first, second] = left.map((line) => [line.split(' ')[2], Number(line.split(' ')[0]) >= 3]);
+    expect([first, second]).toEqual([
+      ['b', false],
+      ['a', true],
+    ]);
+  });
+
   const anyChats = fc.array(
     fc.oneof(fc.constantFrom('1', '-4', '-5'), fc.integer({ min: -50, max: 50 }).map(String)),
     { minLength: 1, maxLength: 300, size: 'max' },

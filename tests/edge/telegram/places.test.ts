@@ -67,7 +67,30 @@ test('what is said in a topic is answered there, with a file too', async () => {
   expect(api.callsOf('sendChatAction').at(-1)).toMatchObject({ message_thread_id: 77 });
 });
 
+test('a group of strangers hears nothing when somebody brings the bot into it', async () => {
+  await using scene = await openScene();
+  const { api, serve } = scene;
+  serve(wholeBot({ is: 'invited', ids: ['telegram:9999'] }));
+  const strange = new Group(api, -4002);
+  strange.invites('Mal');
+  strange.says('Mal', '@a_cellar_bot T4?');
+  expect((await strange.reads(1)).text).toContain('This bot is for invited people');
+  expect(strange.got).toHaveLength(1);
+});
+
 describe('a file', () => {
+  test('that takes long to be sent keeps nobody in its chat from being answered', async () => {
+    await using scene = await openScene();
+    const { api, rosa, serve } = scene;
+    serve({ ...wholeBot(), times: { finish_s: 50 } });
+    rosa.sends(BEFORE);
+    await rosa.reads(1);
+    api.fail('sendPhoto', 'hang');
+    rosa.sends('picture T4');
+    rosa.sends('T4?');
+    expect(await rosa.reads(2)).toContain('T4');
+  });
+
   test('is sent once it can be: after a refusal for a while, a cut, and a fault', async () => {
     await using scene = await openScene();
     const { api, serve } = scene;
