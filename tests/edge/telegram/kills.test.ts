@@ -20,5 +20,6 @@ test.each(['polling', 'webhook'] as const)(
       rmSync(folder, { recursive: true });
     }
   },
-  60_000,
+  // Each process takes a while to start on a machine that has other things to do.
+  240_000,
 );

@@ -25,7 +25,7 @@ test('after a week of silence what is younger than 12 hours is answered, and eac
       received_at: 1000 * (NOW_s - WEEK_s),
     })),
   );
-  const anaToday = new Person(api, 7001, { begun_s: NOW_s - 11 * HOUR_s });
+  const anaToday = new Person(api, 7001, { begun_s: NOW_s - 2 * HOUR_s });
   anaToday.sends('T4 1450 gal pH 3.58 free 21');
   const rui = new Person(api, 7002, { begun_s: NOW_s - 13 * HOUR_s });
   rui.sends('added 137 g kmbs T12');
