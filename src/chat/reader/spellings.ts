@@ -25,6 +25,7 @@ export function phrasesOf(
   entry: string,
   { elides, umlauts }: Pick<Words, 'elides' | 'umlauts'>,
 ): readonly string[] {
+  if (!/[^ -&(-~]/.test(entry)) return [entry];
   const isPlain = !/[^ -~]/.test(entry);
   const plain = isPlain ? entry : foldEntry(entry);
   const whole = elides ? partElided(plain) : plain;

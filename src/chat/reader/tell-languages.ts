@@ -19,42 +19,39 @@ export interface ToldLanguages {
 /** Names that are the same everywhere tell no language, nor does what is written alike in all. */
 const TELLS_NONE = /^cue:variety$/;
 
-/** The languages that have a word, a bit each: those that have it at all, and those in whose talk it is. */
-interface Having {
-  any: number;
-  /** Without the names of things, which wander: a `rosso` makes no Italian. */
-  talk: number;
-}
-
-/** The languages of every word. */
-function languagesOfWords(lists: readonly Words[]): ReadonlyMap<string, Having> {
-  const known = new Map<string, Having>();
+/**
+ * The languages of every word, a bit each: those that have it at all, and above `TALK` those in whose talk it is, without
+ * the names of things, which wander: a `rosso` makes no Italian.
+ */
+function languagesOfWords(lists: readonly Words[]): ReadonlyMap<string, number> {
+  const known = new Map<string, number>();
   for (const [n, list] of lists.entries()) {
     const { says, own = {}, neverMended = [] } = list;
-    const add = (entries: readonly string[], isTalk: boolean): void => {
-      for (const entry of entries) {
-        for (const phrase of phrasesOf(entry, list))
-          for (const word of phrase.split(/[ ']+/)) {
-            const having = known.get(word) ?? { any: 0, talk: 0 };
-            having.any |= 1 << n;
-            if (isTalk) having.talk |= 1 << n;
-            known.set(word, having);
-          }
-      }
+    const add = (entries: readonly string[], bits: number): void => {
+      for (const entry of entries)
+        for (const phrase of phrasesOf(entry, list)) {
+          if (!/[ ']/.test(phrase)) known.set(phrase, (known.get(phrase) ?? 0) | bits);
+          else for (const word of phrase.split(/[ ']+/)) known.set(word, (known.get(word) ?? 0) | bits);
+        }
     };
+    const [name, talk] = [1 << n, (1 << n) | (1 << (n + TALK))];
     for (const [tag, entries] of Object.entries(says) as [Tag, readonly string[]][])
-      if (!TELLS_NONE.test(tag)) add(entries, tag.startsWith('cue:'));
-    for (const entries of Object.values(own)) add(entries, true);
-    add(neverMended, false);
+      if (!TELLS_NONE.test(tag)) add(entries, tag.startsWith('cue:') ? talk : name);
+    for (const entries of Object.values(own)) add(entries, talk);
+    add(neverMended, name);
   }
   for (const entries of Object.values(COMMON)) for (const entry of entries) known.delete(entry);
   return known;
 }
 
-let known: ReadonlyMap<string, Having> | undefined;
+/** The bits of talk stand so far above those of names; so many languages there can be. */
+const TALK = 15;
+const NAMES = (1 << TALK) - 1;
+
+let known: ReadonlyMap<string, number> | undefined;
 
 /** Built when the first message comes. */
-const knownWords = (): ReadonlyMap<string, Having> => (known ??= languagesOfWords(ALL_WORDS));
+const knownWords = (): ReadonlyMap<string, number> => (known ??= languagesOfWords(ALL_WORDS));
 
 /** From this length one word alone tells a second language; own threshold. */
 const CLEAR_LENGTH = 6;
@@ -83,22 +80,27 @@ const countOf = (mask: number): number => {
  */
 export function tellLanguages(text: string, chat: Language): ToldLanguages {
   const words = text.match(WORD) ?? [];
-  const having = words.flatMap((word) => (word.length > 1 ? (knownWords().get(word) ?? []) : []));
-  const scoreOf = (n: number, kind: keyof Having): number => {
+  const masks = words.flatMap((word) => (word.length > 1 ? (knownWords().get(word) ?? []) : []));
+  const scoreOf = (n: number, shift: number): number => {
     let score = 0;
-    for (const { [kind]: mask } of having) if (mask & (1 << n)) score += 1 / countOf(mask);
+    for (const mask of masks) {
+      const having = (mask >> shift) & NAMES;
+      if (having & (1 << n)) score += 1 / countOf(having);
+    }
     return score;
   };
-  const scores = ALL_WORDS.map(({ language }, n) => ({ language, n, score: scoreOf(n, 'any') }));
+  const scores = ALL_WORDS.map(({ language }, n) => ({ language, n, score: scoreOf(n, 0) }));
   const own = scores.find(({ language }) => language === chat);
   const best = scores.reduce((a, b) => (b.score > a.score + 1e-9 ? b : a), own ?? scores[0]!);
   // One short word may be anything: a name, a slip.
   const isMissing = (n: number): boolean => {
-    const only = new Set(words.filter((word) => word.length > 2 && knownWords().get(word)?.any === 1 << n));
+    const only = new Set(
+      words.filter((word) => word.length > 2 && ((knownWords().get(word) ?? 0) & NAMES) === 1 << n),
+    );
     return only.size > 1 || [...only].some(({ length }) => length >= CLEAR_LENGTH);
   };
   const others = scores.filter(({ n }) => n !== best.n && isMissing(n)).map(({ language }) => language);
-  const [talk, ownTalk] = [scoreOf(best.n, 'talk'), own === undefined ? 0 : scoreOf(own.n, 'talk')];
+  const [talk, ownTalk] = [scoreOf(best.n, TALK), own === undefined ? 0 : scoreOf(own.n, TALK)];
   const isClear =
     best !== own && (ownTalk === 0 ? talk >= CLEAR_TALK : talk >= CLEAR_MIXED_TALK && ownTalk <= talk / 2);
   return { first: best.language, others, isTold: best.score > 0, isClear };
