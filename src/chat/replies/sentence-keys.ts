@@ -380,6 +380,12 @@ export interface SentenceValues {
   'group-how': never;
   'group-joined': never;
   'guest-not-kept': never;
+  'help-bottling-1': never;
+  'help-bottling-2': never;
+  'help-bottling-3': never;
+  'help-bottling-4': never;
+  'help-bottling-5': never;
+  'help-bottling-6': never;
   'help-files-1': never;
   'help-files-2': never;
   'help-files-3': never;
@@ -787,7 +793,7 @@ export interface SentenceValues {
   'round-not-understood': 'about';
   'round-noted': 'count' | 'entries' | 'list' | 'when';
   'round-noted-before': 'list';
-  'round-noted-each': 'entries' | 'list' | 'vessel' | 'when';
+  'round-noted-each': 'entry' | 'list' | 'vessel' | 'when';
   'round-noted-line': 'entry' | 'list' | 'vessel' | 'when';
   'round-noted-none': 'entries';
   'round-noted-rest': never;
@@ -798,7 +804,6 @@ export interface SentenceValues {
   'round-open-more': 'count';
   'round-percent': 'strength';
   'round-pick': 'all' | 'from' | 'to';
-  'round-pick-none': 'all';
   'round-pick-noted': 'entry' | 'vessel';
   'round-red': 'red';
   'round-rest': 'list' | 'strength';

@@ -107,12 +107,7 @@ function warningLine({ code, values }: Told, manner: Manner, room: Line['room'])
   const texts = Object.entries(values).map(
     ([name, value]) => [name, besideLimit(name, values, manner) ?? textOf(name, value, manner)] as const,
   );
-  if (code === 'total-unknown' && totalMatters({ code, values }))
-    return line(room, 'warning-total-unknown-half', {
-      limit_mg_L: textOf('limit_mg_L', values['limit_mg_L'] ?? '', manner),
-      unit: manner.unit,
-    });
-  if (code === 'total-unknown' && mostMatters({ code, values }))
+  if (code === 'total-unknown' && typeof values['most_total_mg_L'] === 'number')
     return line(room, 'warning-total-unknown-most', {
       ...lawValues(values, manner),
       ...byName(texts),
