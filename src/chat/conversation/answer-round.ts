@@ -1,3 +1,4 @@
+import { roundTotals } from '../attachments/round/round-totals.ts';
 import type { AdditiveAtHand } from '../../core/additives/additive-id.ts';
 import type { Reading, Understood } from '../reader/understood.ts';
 import type { Button, Line, Reply } from '../replies/reply.ts';
@@ -6,6 +7,7 @@ import { buttonsFor } from './buttons.ts';
 import type { RoundSheet } from '../attachments/round/round-sheet.ts';
 import { roundBody } from './lines/round-body.ts';
 import { roundFoot, type SaidInRound } from './lines/round-foot.ts';
+import { shortLines } from './lines/stock.ts';
 import { roundHead } from './lines/round-head.ts';
 import { roundName } from './lines/round-names.ts';
 import { vesselText } from './lines/vessel.ts';
@@ -70,7 +72,12 @@ export function answerRound(understood: Understood, here: Here): Handled {
       : [
           {
             language,
-            lines: [...roundBody(sheet, isCautioning(said)), ...otherLines(said), ...foot],
+            lines: [
+              ...roundBody(sheet, isCautioning(said)),
+              ...roundTotals(sheet.rows).flatMap((total) => shortLines(total, here)),
+              ...otherLines(said),
+              ...foot,
+            ],
             buttons,
           },
         ];
