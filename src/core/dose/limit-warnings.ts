@@ -48,7 +48,9 @@ function standingWarnings(
   { total_from }: LimitWarningFacts,
 ): readonly Warning[] {
   const { rule, region, limit_mg_L, operator, confidence } = limit;
-  const shared = { rule, region, limit_mg_L, operator, confidence };
+  // What may go in now, with what is kept below the limit.
+  const room_mg_L = Math.max(0, limit_mg_L - room.kept_mg_L - (beforeOf(limit, room) ?? 0));
+  const shared = { rule, region, limit_mg_L, operator, confidence, room_mg_L };
   if (standing === 'within') return [];
   if (limit.of === 'free')
     return standing === 'over'
