@@ -88,7 +88,7 @@ export type Answer =
 /** What a round takes of each additive, and how many of its lines have no amount because something is wrong, missing or to be chosen. */
 export interface RoundData {
   readonly totals: readonly TotalToFetch[];
-  readonly problems: number;
+  readonly problems: number; // how many lines
 }
 
 /** Something with files that the edge does once the message's writes are durable. Times in milliseconds since 1970. */

@@ -32,7 +32,9 @@ export const MOST_LINES = 300;
 
 /** Tags of all words and phrases of some terms, shorter phrases inside longer ones included. */
 function cuesOf(terms: readonly Term[], lexicon: Lexicon): ReadonlySet<Tag> {
-  const words = terms.flatMap(({ kind, text }) => (kind === 'word' ? (lexicon.elides ? partElided(text) : text).split(/[ -]/) : ['\n']));
+  const words = terms.flatMap(({ kind, text }) =>
+    kind === 'word' ? (lexicon.elides ? partElided(text) : text).split(/[ -]/) : ['\n'],
+  );
   const cues = new Set<Tag>();
   for (let i = 0; i < words.length; i++) {
     let phrase = words[i] ?? '';
@@ -106,7 +108,7 @@ function readOne(board: Board, settings: ReaderSettings): Reading {
  * ```
  */
 export function readMessage(message: string, settings: ReaderSettings, waiting?: AwaitedField): Understood {
-  return readText(message, settings, { longest: LONGEST_MESSAGE, ...(waiting && { waiting }) });
+  return readText(message, settings, { most: LONGEST_MESSAGE, ...(waiting && { waiting }) });
 }
 
 /** The longest text that the lines of a sheet make: as many as a round may have, each as long as people write them. */
@@ -114,13 +116,13 @@ const LONGEST_SHEET = 32_768;
 
 /** Reads the lines of a sheet that somebody sent as they would be read in a message, which has no room for so many. */
 export function readSheetText(lines: string, settings: ReaderSettings): Understood {
-  return readText(lines, settings, { longest: LONGEST_SHEET });
+  return readText(lines, settings, { most: LONGEST_SHEET });
 }
 
 function readText(
   message: string,
   settings: ReaderSettings,
-  { longest, waiting }: { readonly longest: number; readonly waiting?: AwaitedField },
+  { most, waiting }: { readonly most: number; readonly waiting?: AwaitedField },
 ): Understood {
   const text = withoutMentions(message);
   const decimalMark = /\d,\d{1,2}(?!\d)/.test(text) && !/\d\.\d/.test(text) ? ',' : '.';
@@ -129,7 +131,7 @@ function readText(
     shared = {},
     language = settings.language,
   ): Understood => ({ readings, shared, language, decimalMark });
-  if (text.length > longest) {
+  if (text.length > most) {
     const danger = recogniseEmergency(foldText(text.slice(0, LONGEST_MESSAGE)).text, settings.language);
     return danger
       ? understood([emptyReading('emergency', { topic: danger.danger })], {}, danger.language)

@@ -36,9 +36,8 @@ const inSmallUnit = ({ value, unit }: Measure): number =>
  *
  * @example
  * ```ts
- * const powder = { id: 'potassium-metabisulfite' } as const
- * totalsToFetch([{ additive: powder, measure: { value: 103, unit: 'g' }, count: 1 }, { additive: powder, measure: { value: 5.4, unit: 'g' }, count: 4 }]) // => [{ additive: 'potassium-metabisulfite', mass_g: 124.6, measure: { value: 124.6, unit: 'g' } }]
- * totalsToFetch([{ additive: powder, measure: { value: 1.25, unit: 'kg' }, count: 1 }])[0]?.mass_g // => 1250
+ * totalsToFetch([{ additive: { id: 'potassium-metabisulfite' }, measure: { value: 103, unit: 'g' }, count: 1 }, { additive: { id: 'potassium-metabisulfite' }, measure: { value: 5.4, unit: 'g' }, count: 4 }]) // => [{ additive: 'potassium-metabisulfite', mass_g: 124.6, measure: { value: 124.6, unit: 'g' } }]
+ * totalsToFetch([{ additive: { id: 'potassium-metabisulfite' }, measure: { value: 1.25, unit: 'kg' }, count: 1 }])[0]?.mass_g // => 1250
  * ```
  */
 export function totalsToFetch(weighed: readonly Weighed[]): TotalToFetch[] {

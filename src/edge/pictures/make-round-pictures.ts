@@ -29,7 +29,7 @@ export async function makeRoundPictures(
   const files: BroughtFile[] = [];
   for (const [i, page] of pages.entries()) {
     const bytes = await drawPicture({ svg: roundSvg(page) });
-    const numbered = pages.length === 1 ? {} : { page: i + 1 };
+    const numbered = pages.length === 1 ? {} : { place: i + 1 };
     files.push({ name: roundName(sheet.at, zone, { ending: 'png', ...numbered }), bytes, isPicture: true });
   }
   return files;

@@ -82,3 +82,14 @@ test('200 lines come through, more than a message has room for', async () => {
   // 12 mg/L in 2,000 L: 42 g each.
   expect(handled.round?.totals[0]?.mass_g).toBe(8400);
 });
+
+test('a target of up to 2 is molecular where its heading does not say free; molecular alone is what was reckoned', async () => {
+  const rows = (last: string): string => `T1,2000,3.4,11,${last}\nT2,2000,3.4,12,${last}\n`;
+  const targets = async (heading: string): Promise<unknown[]> =>
+    ((await sendFile(`vessel,volume L,pH,free,${heading}\n${rows('0.6')}`)).understood?.readings ?? []).map(
+      ({ fields }) => fields.target,
+    );
+  expect(await targets('target')).toEqual([{ molecular_mg_L: 0.6 }, { molecular_mg_L: 0.6 }]);
+  expect(await targets('target free')).toEqual([{ free_mg_L: 0.6 }, { free_mg_L: 0.6 }]);
+  expect(await targets('molecular')).toEqual([]);
+});

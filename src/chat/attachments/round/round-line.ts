@@ -16,7 +16,7 @@ const BEFORE: Readonly<Record<RoundColumn, string>> = {
   free: 'free ',
   total: 'total ',
   temperature: '',
-  target: 'target free ',
+  target: 'target ',
   molecular: 'target molecular ',
   add: 'add ',
 };
@@ -130,5 +130,7 @@ function figurePart(of: RoundColumn, cell: TableCell, heading: string): string |
   if (!FIGURE.test(text)) return undefined;
   const unit =
     of !== 'add' ? '' : `${/[a-z]$/i.test(text) ? '' : ' mg/L'}${/so2/i.test(heading) ? ' SO2' : ''}`;
-  return `${BEFORE[of]}${text}${unit}`;
+  // Without the word the reader judges by the figure: up to 2 a target is molecular.
+  const what = of === 'target' && /free|fso2/i.test(heading) ? 'free ' : '';
+  return `${BEFORE[of]}${what}${text}${unit}`;
 }

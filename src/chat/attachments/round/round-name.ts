@@ -4,9 +4,9 @@ import { localTimeOf } from '../../../core/time/local-time-of.ts';
 export function roundName(
   at: number,
   zone: string,
-  { ending, page }: { readonly ending: string; readonly page?: number },
+  { ending, place }: { readonly ending: string; readonly place?: number },
 ): string {
   const { year, month, day } = localTimeOf(at, zone);
   const date = [String(year), ...[month, day].map((part) => String(part).padStart(2, '0'))].join('-');
-  return `weigh-out-${date}${page === undefined ? '' : `-${page}`}.${ending}`;
+  return `weigh-out-${date}${place === undefined ? '' : `-${place}`}.${ending}`;
 }

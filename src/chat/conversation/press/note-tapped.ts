@@ -57,7 +57,6 @@ export async function noteEach(
   const head: Line = {
     ...line('first', additions.length === 1 ? 'round-noted-line' : 'round-noted-each', {
       entry: entries,
-      entries,
       vessel: vesselNames(notes.flatMap(({ happening }) => happening.vessels)),
       when: momentText(here.message.at, tellingOf(here)),
     }),

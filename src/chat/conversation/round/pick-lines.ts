@@ -15,13 +15,13 @@ const A_PAGE = 8;
 /** The lines of a round some at a time, each with a button; what was noted before is told and has none. */
 export async function pickLines(
   sheet: RoundSheet,
-  page: number,
+  place: number,
   here: Here,
   view: CellarView,
 ): Promise<Handled> {
   const { rows } = await rowsToNote(sheet.rows, here, view);
   const pages = Math.max(1, Math.ceil(rows.length / A_PAGE));
-  const from = (page % pages) * A_PAGE;
+  const from = (place % pages) * A_PAGE;
   const lines: Line[] = [];
   const buttons: Omit<Button, 'mark'>[] = [];
   for (const { row, additions } of rows.slice(from, from + A_PAGE)) {
@@ -36,7 +36,7 @@ export async function pickLines(
   }
   const all = String(rows.length);
   const to = String(Math.min(rows.length, from + A_PAGE));
-  const next = { key: `rl:${sheet.ref}:${(page + 1) % pages}`, label: 'button-round-next', values: {} };
+  const next = { key: `rl:${sheet.ref}:${(place + 1) % pages}`, label: 'button-round-next', values: {} };
   return replying(here, {
     lines: [line('first', 'round-pick', { from: String(from + 1), to, all }), ...lines],
     buttons: [...buttons, ...(pages > 1 ? [next] : [])].map((one, at) => ({ ...one, mark: String(at + 1) })),
