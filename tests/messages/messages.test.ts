@@ -18,10 +18,12 @@ for (const file of [
   'en-solutions.jsonl',
   'en-rounds.jsonl',
   'en-must.jsonl',
+  'en-bottling.jsonl',
   'en-law.jsonl',
   'refused.en.jsonl',
   'emergency.jsonl',
   'en-commands.jsonl',
+  'en-lab.jsonl',
   ...ofLanguages,
 ]) {
   describe(`messages of ${file} are read as their labels say`, () => {
@@ -33,7 +35,7 @@ for (const file of [
 }
 
 describe('the own words, statements, moments, lots and remarks of a message are read as its label says', () => {
-  test.each([...labelledIn('en-commands.jsonl'), ...labelledIn('en-law.jsonl')])(
+  test.each(['en-commands.jsonl', 'en-law.jsonl', 'en-lab.jsonl'].flatMap((file) => labelledIn(file)))(
     '$id reads as it was meant: $text',
     (labelled) => {
       const { beside } = judge(labelled);

@@ -53,8 +53,7 @@ function vesselsOf(findings: readonly Finding[]): readonly string[] {
 
 /** `blend T4 T7`: which share of the second brings the first within bounds; `blend T4`: of which other. */
 function readBlend(talk: Talk): Command | undefined {
-  if (!says(talk, 'lab-blend') || !saysOnly(talk, ['lab-blend', 'with', 'and', 'to', 'from', ...SMALL]))
-    return undefined;
+  if (!says(talk, 'lab-blend') || !saysOnly(talk, ['lab-blend', 'with', 'and', ...SMALL])) return undefined;
   const [vessel, other, third] = vesselsOf(talk.board.findings);
   if (vessel === undefined || third !== undefined) return undefined;
   return { name: 'blend', vessel, ...(other !== undefined && { other }) };

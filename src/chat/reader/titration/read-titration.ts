@@ -63,15 +63,18 @@ function withoutLabWords(board: Board): Board {
   return board;
 }
 
-/** Two figures at least, one of them in millilitres or as the strength of a titrant. */
-const isTitration = (board: Board, figures: readonly LabFigure[]): boolean =>
-  figures.length >= 2 &&
-  figures.filter(({ unit }) => unit === 'mL' || unit === 'N' || unit === 'M').length >= 1 &&
-  (figures.some(({ unit }) => unit === 'N' || unit === 'M') ||
-    board.pieces.some((_, k) =>
-      isOwn(board.pieces, k, 'lab-sample', 'lab-titrant', 'lab-titration', 'lab-iodate'),
-    ) ||
-    figures.filter(({ unit }) => unit === 'mL').length >= 2);
+/**
+ * Two volumes in millilitres, or one beside the strength of a titrant; or sample and titrant by their names. A sample
+ * alone may stand beside readings that are told already.
+ */
+function isTitration({ pieces }: Board, figures: readonly LabFigure[]): boolean {
+  const says = (id: OwnWordId): boolean => pieces.some((_, k) => isOwn(pieces, k, id));
+  const ofUnit = (...units: readonly LabFigure['unit'][]): number =>
+    figures.filter(({ unit }) => unit !== undefined && units.includes(unit)).length;
+  const [volumes, strengths] = [ofUnit('mL'), ofUnit('N', 'M')];
+  const named = [says('lab-sample'), says('lab-titrant')].filter(Boolean).length;
+  return figures.length >= 2 && (volumes >= 2 || named === 2 || (strengths > 0 && volumes + named > 0));
+}
 
 function methodOf({ pieces }: Board): Pick<SaidTitration, 'method'> {
   const says = (...ids: readonly OwnWordId[]): boolean => pieces.some((_, k) => isOwn(pieces, k, ...ids));

@@ -397,7 +397,7 @@ export const en: Words = {
     'cue:pdo': ['pdo', 'pdo wine', 'national pdo'],
     'cue:bulk': ['bulk wine', 'bulk export', 'in bulk', 'bulk for export', 'for bulk export'],
     'cue:keep': ['keep', 'keep back', 'hold back', 'set aside', 'reserve', 'save', 'leave', 'leave room for', 'keep room for'],
-    'cue:bottling': ['bottling', 'to bottle', 'for bottling', 'before bottling', 'at bottling', 'pre bottling', 'prebottling', 'bottling day'],
+    'cue:bottling': ['bottling', 'to bottle', 'before bottling', 'pre bottling', 'prebottling', 'bottling day'],
     'cue:oxygen': ['oxygen', 'o2', 'dissolved oxygen', 'diss oxygen', 'dissolved o2', 'd o', 'tpo', 'total package oxygen', 'total oxygen', 'headspace oxygen'],
     'cue:bottling-reserve': ['bottling reserve', 'reserve for bottling', 'kept for bottling'],
     'cue:bottle-unit': ['bottle', 'bottles', 'btl', 'btls', 'magnum', 'magnums'],
@@ -604,7 +604,7 @@ export const en: Words = {
     'lab-molecular': ['molecular', 'mol', 'molecular so2', 'both bases', 'bases'],
     'lab-so2': ['so2', 'free', 'free so2', 'sulfite', 'sulphite', 'needed', 'need', 'total', 'total so2'],
     'lab-forecast': [
-      'forecast', 'outlook', 'prognosis', 'prediction', 'how long will it last', 'how long does it last', 'how long will it hold', 'next addition', 'when is the next addition',
+      'forecast', 'when will', 'when does', 'outlook', 'prognosis', 'prediction', 'how long will it last', 'how long does it last', 'how long will it hold', 'next addition', 'when is the next addition',
       'when will it need', 'when does it need', 'when will it fall', 'when does it fall below', 'when next', 'when will the next addition be', 'when is it next', 'when to add next', 'how long will so2 last', 'how long until',
     ],
     'lab-blend': ['blend', 'blending', 'which blend', 'blend it', 'mix', 'blend options', 'blend down'],
