@@ -8,7 +8,7 @@ import type { Me } from './me.ts';
 import { createOutbox, type Outbox } from './outbox.ts';
 import type { Limits } from './pace.ts';
 import type { Platform } from './platform.ts';
-import { createReceipts } from './receipts.ts';
+import type { Receipts } from './receipts.ts';
 import { sendPost } from './send-post.ts';
 import { makeTellTapSeen } from './tell-tap-seen.ts';
 import { chatNameOf } from './who-of.ts';
@@ -26,6 +26,7 @@ export interface MailOptions
   readonly platform: Platform;
   readonly limits: Limits;
   readonly meter: Meter;
+  readonly receipts: Receipts;
 }
 
 /** What comes in, and what goes out. */
@@ -41,8 +42,8 @@ const MOST_UNSENT = 5000;
 
 /** Joins what arrives to its answer, and the answer to what is sent. */
 export function joinMail(options: MailOptions): Mail {
-  const { platform, log, signal, migrateChat, fileWork } = options;
-  const sending = { api: platform.sends, receipts: createReceipts(), signal };
+  const { platform, log, signal, migrateChat, fileWork, receipts } = options;
+  const sending = { api: platform.sends, receipts, signal };
   const move = async (from: number, to: number): Promise<void> =>
     migrateChat?.(chatNameOf(from), chatNameOf(to));
   const outbox = createOutbox({

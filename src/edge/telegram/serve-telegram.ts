@@ -12,12 +12,14 @@ import { CHANNEL } from './channel.ts';
 import { confirmOffset } from './confirm-offset.ts';
 import { greet } from './greet.ts';
 import { joinMail } from './join-mail.ts';
+import { keepReceipts, readReceipts } from './kept-receipts.ts';
 import type { FileWork } from './make-carry-files.ts';
 import { openDoor, type DoorAddress } from './open-door.ts';
 import { USUAL_LIMITS, type Limits } from './pace.ts';
 import { openPlatform } from './platform.ts';
 import { poll } from './poll.ts';
 import { pruneNowAndThen } from './prune-now-and-then.ts';
+import { createReceipts } from './receipts.ts';
 import { remind } from './remind.ts';
 import { showCommands } from './show-commands.ts';
 
@@ -87,7 +89,9 @@ export async function serveTelegram(options: TelegramOptions): Promise<void> {
     const backOff = createBackOff({ root, clock, log, tell, signal });
     const me = await greet(platform, { backOff, log, tell, signal });
     if (me === undefined) return;
-    const mail = joinMail({ ...options, me, platform, limits, meter: door.meter, signal: giveUp.signal });
+    const receipts = createReceipts(await readReceipts(store));
+    const { meter } = door;
+    const mail = joinMail({ ...options, me, platform, limits, meter, receipts, signal: giveUp.signal });
     const { inbox, outbox } = mail;
     door.watch(mail);
     void showCommands({ ...options, platform });
@@ -103,6 +107,9 @@ export async function serveTelegram(options: TelegramOptions): Promise<void> {
     await Promise.race([finished, clock.wait(1000 * times.finish_s, giveUp.signal)]);
     giveUp.abort();
     await Promise.all([inbox.idle(), outbox.idle()]);
+    await keepReceipts(receipts.all(), { store, clock }).catch((err: unknown) =>
+      log.warn({ err }, 'the numbers of the last messages could not be kept'),
+    );
     const [left, unsent] = [inbox.count(), outbox.count()];
     if (left + unsent > 0) log.warn({ left, unsent }, 'there was no time left for some messages');
     await confirmOffset(offset, { api: platform.calls, clock, log, within_s: times.confirm_s });

@@ -37,7 +37,7 @@ describe('an edited reading', () => {
     ]);
   });
 
-  test('is answered anew after a restart, as nobody knows the message any more', async () => {
+  test('has its answer corrected in place after a restart too', async () => {
     await using scene = await openScene();
     const { api, rosa, serve } = scene;
     const whole = wholeBot();
@@ -47,8 +47,9 @@ describe('an edited reading', () => {
     await first.stop();
     serve(whole);
     rosa.edits(AFTER);
-    expect(await rosa.reads(2)).toMatch(/^Corrected\.\nT4: weigh 48 g/);
-    expect(api.callsOf('editMessageText')).toEqual([]);
+    await api.until(() => api.callsOf('editMessageText').length === 1);
+    await api.until(() => rosa.texts[0]?.startsWith('Corrected.\nT4: weigh 48 g') === true);
+    expect(rosa.got).toHaveLength(1);
   });
 });
 
