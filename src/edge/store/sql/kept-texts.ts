@@ -84,14 +84,18 @@ const drop = readyQuery((db, { cellar, key }: { readonly cellar: string; readonl
   db.deleteFrom('kept').where('cellar', '=', cellar).where('key', '=', key),
 );
 
-/** Keeps a text in place of what was there. What has lapsed goes with it. */
+/** Keeps a text in place of what was there. */
 export async function keepText(
   db: Kysely<Tables>,
   cellar: string,
-  { key, text, until, now }: KeptText & { readonly now: number },
+  { key, text, until }: KeptText,
 ): Promise<void> {
   await keep(db, { cellar, key, text, until: until ?? null });
-  if (until !== undefined) await dropLapsed(db, { cellar, now });
+}
+
+/** Drops the texts of a cellar that have lapsed. */
+export async function dropLapsedTexts(db: Kysely<Tables>, cellar: string, now: number): Promise<void> {
+  await dropLapsed(db, { cellar, now });
 }
 
 /** Drops what is kept under a key, where there is anything. */

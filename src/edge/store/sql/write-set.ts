@@ -2,7 +2,7 @@ import type { Kysely } from 'kysely';
 import type { Write } from '../../../core/cellar/cellar-store.ts';
 import { noteEntries } from '../projection/note-entries.ts';
 import { keepDue, markSaid } from './due-things.ts';
-import { dropText, keepText } from './kept-texts.ts';
+import { dropLapsedTexts, dropText, keepText } from './kept-texts.ts';
 import { markHandled } from './arrived-things.ts';
 import { keepPerson } from './people.ts';
 import { keepPost } from './posts.ts';
@@ -31,7 +31,7 @@ export async function writeSet(
       case 'entry':
         break;
       case 'keep':
-        await keepText(db, cellar, { ...write, now });
+        await keepText(db, cellar, write);
         break;
       case 'drop':
         await dropText(db, cellar, write.key);
@@ -56,4 +56,7 @@ export async function writeSet(
         break;
     }
   }
+  // Where something is kept that lapses, what has lapsed goes.
+  if (writes.some((write) => write.kind === 'keep' && write.until !== undefined))
+    await dropLapsedTexts(db, cellar, now);
 }
