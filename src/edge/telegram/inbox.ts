@@ -64,7 +64,7 @@ export function createInbox(options: InboxOptions): Inbox {
       await handling.answer(first);
       return 1;
     }
-    const areKept = await Promise.all(stale.map(({ isKept = true }) => isKept));
+    const areKept = await Promise.all(stale.map(async ({ isKept = true }) => isKept));
     // What could not be kept the platform brings again.
     const [oldest, ...others] = stale.filter((_, at) => areKept[at]);
     if (oldest !== undefined) await handling.leave([oldest, ...others]);

@@ -73,7 +73,7 @@ export async function runStorm(file: string, { updates, chats, second_ms }: Stor
   const store = await openSqliteStore(file, { now: clock.now, report: () => undefined });
   const say = makeSay(loadLocales());
   const log = createLog({ level: 'trace', secret: TOKEN, to: { write: (line) => void lines.push(line) } });
-  const { serveDue: _, ...conversation } = joinConversation({
+  const conversation = joinConversation({
     handle,
     say,
     store,
