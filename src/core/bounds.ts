@@ -37,6 +37,7 @@ export const BOUNDS = {
   tablet_salt_g: { min: 0, max: 1000, aboveMin: true, unit: 'g' },
   rate_mg_L: { min: 0, max: 1_000_000, unit: 'mg/L' },
   added_mg_L: { min: 0, max: 10_000, unit: 'mg/L' },
+  oxygen_mg_L: { min: 0, max: 20, unit: 'mg/L' },
   vessels: { min: 1, max: 10_000, unit: '' },
 } as const satisfies Readonly<Record<string, Bound>>;
 

@@ -63,6 +63,11 @@ export const SOURCES = {
     title: 'agriculture press association of Campania, art. 29: aqueous SO2 in use 5 to 8 %',
     read: true,
   },
+  'as-stated': { title: 'a figure as the person stated it', read: true },
+  'oxygen-trade-figure': {
+    title: 'trade figures of free SO2 lost to oxygen at bottling, not confirmed',
+    read: false,
+  },
   'reussir-vigne': { title: 'Réussir Vigne, consultants’ answers on sulphiting', read: true },
   'german-trade-text-2012': { title: 'a German trade text of 2012 on SO2 in must', read: true },
   'food-additives-data-book': {

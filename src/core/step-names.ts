@@ -20,6 +20,8 @@ export const STEP_KINDS = {
   },
   'molecular-now': { symbol: 'M', formula: 'free SO2 ÷ (10^(pH − pK) + 1)' },
   'free-needed': { symbol: 'F', formula: 'target molecular SO2 × (10^(pH − pK) + 1)' },
+  'oxygen-loss': { symbol: 'L', formula: 'oxygen × SO2 for 1 mg of it' },
+  'free-before-bottling': { symbol: 'F', formula: 'free SO2 wanted at bottling + what oxygen takes' },
   addition: { symbol: 'A', formula: 'free SO2 wanted − free SO2 now' },
   'dose-with-allowance': { symbol: 'D', formula: 'addition × (1 + allowance)' },
   'dose-with-share': { symbol: 'D', formula: 'addition ÷ (1 − share that binds)' },
@@ -62,7 +64,7 @@ export const STEP_KINDS = {
     formula: 'citric acid in a litre × volume',
     source: 'common-practice',
   },
-  'added-by-one-mL': { symbol: 'A', formula: '1 mL × SO2 in the stock ÷ volume of the barrel' },
+  'added-by-one-millilitre': { symbol: 'A', formula: '1 mL × SO2 in the stock ÷ volume of the barrel' },
   'stock-for-a-barrel': { symbol: 'v', formula: 'rise × volume of the barrel ÷ SO2 in the stock' },
   'solution-strength': { symbol: 'c', formula: 'SO2 that goes in ÷ volume of the solution × 0.1 L' },
   'solution-strength-by-salt': {

@@ -7,6 +7,7 @@ import type {
   StatedAmount,
   WineFacts,
 } from '../../core/dose/request.ts';
+import type { OxygenAtBottling } from '../../core/dose/oxygen-loss.ts';
 import { litresTo } from '../../core/units/volume.ts';
 import { fruitOf } from '../reader/finish-reading.ts';
 import type { AskedField, Fields, Reading } from '../reader/understood.ts';
@@ -65,6 +66,14 @@ function volumeOf({
 }
 
 /** What is known of the wine; the law of the market is the cellar's. */
+/** The oxygen that is allowed for at bottling. */
+function oxygenIn({ marks: { oxygen_mg_L, SO2_per_oxygen } }: Reading): OxygenAtBottling {
+  return {
+    ...(oxygen_mg_L !== undefined && { oxygen_mg_L }),
+    ...(SO2_per_oxygen !== undefined && { SO2_per_oxygen }),
+  };
+}
+
 /** The fruit of which the volume is the must, so that the working begins with it. */
 function fruitIn({ fields, assumed, marks }: Reading): Pick<DoseRequest, 'fruit'> {
   const fruit = fields.volume_L === undefined ? fruitOf(marks, assumed) : undefined;
@@ -128,6 +137,7 @@ export function toDoseRequest(
     ...wineOf(reading, settings),
     ...volumeOf(reading),
     ...fruitIn(reading),
+    ...oxygenIn(reading),
     ...(count !== undefined && { vessels: count }),
     ...optionalAdditive(reading),
     ...(target !== undefined && { target }),

@@ -2,6 +2,7 @@ import type { Board, Finder } from './board.ts';
 import { findAdditiveVolume } from './finders/additive-volume.ts';
 import { findAdditive } from './finders/additive.ts';
 import { findAllowance } from './finders/allowance.ts';
+import { findBottling } from './finders/bottling.ts';
 import { findFruitState, findYield } from './finders/fruit.ts';
 import { findBarrels } from './finders/barrels.ts';
 import { findLawFacts } from './finders/law-facts.ts';
@@ -47,6 +48,7 @@ const FINDERS: readonly Finder[] = [
   findLetterPair,
   findVessel,
   findLawFacts,
+  findBottling,
   findOtherFigures,
   findSolutionUse,
   findOtherQuantities,

@@ -2,12 +2,11 @@ import type { AdditiveId } from '../../core/additives/additive-id.ts';
 import type { FruitState } from '../../core/dose/must-ranges.ts';
 import type { Problem } from '../../core/problem.ts';
 import type { Command, SaidWhen } from './command.ts';
-import type { LANGUAGES } from './words/languages.ts';
+import type { Language } from './words/languages.ts';
 import type { SaidTitration } from './titration/said-titration.ts';
 import type { Category, Product, Stage, Style, Target } from '../../core/wine.ts';
 
-/** The languages of the message language, by their ISO 639-1 codes. */
-export type Language = (typeof LANGUAGES)[number];
+export type { Language } from './words/languages.ts';
 
 /** What a person wants. */
 export type Intent =

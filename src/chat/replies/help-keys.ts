@@ -6,6 +6,7 @@ import type { SentenceKey } from './sentence-keys.ts';
 export const HELP_KEYS: Readonly<Record<string, readonly SentenceKey[]>> = {
   wine: ['help-wine-1', 'help-wine-2', 'help-wine-3', 'help-wine-4', 'help-wine-5', 'help-wine-6', 'help-wine-7', 'help-wine-8', 'help-wine-9'],
   must: ['help-must-1', 'help-must-2', 'help-must-3', 'help-must-4', 'help-must-5', 'help-must-6', 'help-must-7'],
+  bottling: ['help-bottling-1', 'help-bottling-2', 'help-bottling-3', 'help-bottling-4', 'help-bottling-5', 'help-bottling-6'],
   solutions: ['help-solutions-1', 'help-solutions-2', 'help-solutions-3', 'help-solutions-4', 'help-solutions-5', 'help-solutions-6', 'help-solutions-7'],
   law: ['help-law-1', 'help-law-2', 'help-law-3', 'help-law-4', 'help-law-5', 'help-law-6', 'help-law-7', 'help-law-8', 'help-law-9'],
   round: ['help-round-1', 'help-round-2', 'help-round-3', 'help-round-4', 'help-round-5', 'help-round-6', 'help-round-7', 'help-round-8'],

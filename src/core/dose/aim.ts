@@ -2,9 +2,10 @@ import { doseFor, type Allowance } from '../binding/allowance.ts';
 import { freeSO2Needed } from '../chemistry/free-so2-needed.ts';
 import { molecularSO2 } from '../chemistry/molecular-so2.ts';
 import type { Target } from '../wine.ts';
+import { oxygenLoss, type OxygenAtBottling } from './oxygen-loss.ts';
 
 /** What an aim hangs on; all may be unknown. */
-export interface AimFacts extends Allowance {
+export interface AimFacts extends Allowance, OxygenAtBottling {
   readonly ph?: number;
   readonly free_mg_L?: number;
 }
@@ -19,7 +20,8 @@ export interface Aim {
 }
 
 /**
- * What a target takes, as far as it is known: a molecular one needs the pH, a rise needs the free SO2 too.
+ * What a target takes, as far as it is known: a molecular one needs the pH, a rise needs the free SO2 too. Where oxygen
+ * is stated, the free SO2 aimed at is what has to be there before it, so that the target stands after it.
  *
  * @param target in mg/L
  * @param facts pH, free SO2 in mg/L, allowance or share
@@ -30,6 +32,7 @@ export interface Aim {
  * ```ts
  * aimAt({ molecular_mg_L: 0.8 }, { ph: 3.58, free_mg_L: 21 }, 1.81).add_mg_L // => 26.907
  * aimAt({ free_mg_L: 36 }, { free_mg_L: 40 }, 1.81) // => { target_free_mg_L: 36, add_mg_L: 0, dose_mg_L: 0 }
+ * aimAt({ free_mg_L: 30 }, { free_mg_L: 22, oxygen_mg_L: 2 }, 1.81).target_free_mg_L // => 38.008
  * aimAt({ add_mg_L: 28 }, {}, 1.81) // => { add_mg_L: 28, dose_mg_L: 28 }
  * ```
  */
@@ -38,14 +41,17 @@ export function aimAt(target: Target, facts: AimFacts, pK: number): Aim {
   if ('add_mg_L' in target) {
     return { add_mg_L: target.add_mg_L, dose_mg_L: doseFor(target.add_mg_L, facts) };
   }
+  const loss_mg_L = oxygenLoss(facts);
   const wanted: Aim =
     'molecular_mg_L' in target
       ? {
           target_molecular_mg_L: target.molecular_mg_L,
-          ...(ph === undefined ? {} : { target_free_mg_L: freeSO2Needed(target.molecular_mg_L, ph, pK) }),
+          ...(ph === undefined
+            ? {}
+            : { target_free_mg_L: freeSO2Needed(target.molecular_mg_L, ph, pK) + loss_mg_L }),
         }
       : {
-          target_free_mg_L: target.free_mg_L,
+          target_free_mg_L: target.free_mg_L + loss_mg_L,
           ...(ph === undefined ? {} : { target_molecular_mg_L: molecularSO2(target.free_mg_L, ph, pK) }),
         };
   if (wanted.target_free_mg_L === undefined || free_mg_L === undefined) return wanted;

@@ -56,7 +56,9 @@ export type WarningCode =
   | 'no-dose-at-this-stage'
   | 'does-not-stop-fermentation'
   | 'already-dosed'
-  | 'must-may-hinder-malolactic';
+  | 'must-may-hinder-malolactic'
+  | 'malolactic-may-not-start'
+  | 'restart-may-fail';
 
 /** A warning with the figures it is about, by their JSON names, in full precision. */
 export interface Warning {
@@ -116,6 +118,16 @@ export interface CappedDose extends Partial<MeasuredAmount> {
   readonly steps: readonly Step[];
 }
 
+/** What oxygen at bottling takes, mg/L; `loss_mg_L` as measured in the trade and by the formula. */
+export interface BottlingAnswer {
+  readonly oxygen_mg_L: number;
+  readonly loss_mg_L: readonly [number, number];
+  /** What the dose has counted of it. */
+  readonly counted_mg_L: number;
+  /** Free SO2 that is aimed at after the loss; absent without a target. */
+  readonly free_at_bottling_mg_L?: number;
+}
+
 /** The answer of a `dose`; a key is absent when it cannot be known from what was said. */
 export interface DoseAnswer extends Partial<MeasuredAmount> {
   readonly molecular_mg_L?: number;
@@ -140,6 +152,8 @@ export interface DoseAnswer extends Partial<MeasuredAmount> {
   readonly limits?: readonly Limit[];
   /** Present where the dose passes a limit that was read. */
   readonly capped?: CappedDose;
+  /** At bottling: what the stated oxygen takes, and what stands after it. */
+  readonly bottling?: BottlingAnswer;
   /** Of must: what follows from the addition. */
   readonly after_must?: AfterMust;
   readonly warnings: readonly Warning[];

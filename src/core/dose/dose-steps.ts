@@ -5,6 +5,7 @@ import { minus, over, times, type Step, type Term } from '../working.ts';
 import type { Aim } from './aim.ts';
 import { mustLine } from './fruit.ts';
 import { line, printAlike, withEnoughDigits, type Line } from './line.ts';
+import { oxygenLines } from './oxygen-loss.ts';
 import type { DoseRequest } from './request.ts';
 import { toStep, type Rounded } from './rounding.ts';
 import {
@@ -65,6 +66,20 @@ function readingLines(work: DoseWork, digits: number): { lines: Line[]; needed?:
   );
   lines.push(needed);
   return { lines, needed: needed.result };
+}
+
+/** Where oxygen is stated, what it takes has to be there too. */
+function withOxygen(
+  { request }: DoseWork,
+  { lines, needed }: { lines: Line[]; needed?: Term },
+  digits: number,
+): { lines: Line[]; needed?: Term } {
+  const { target } = request;
+  const isFree = target !== undefined && 'free_mg_L' in target;
+  const after = needed ?? (isFree ? shown(target.free_mg_L, 'mg/L', digits) : undefined);
+  const found = after === undefined ? [] : oxygenLines(request, after, digits);
+  const before = found.at(-1)?.result ?? needed;
+  return { lines: [...lines, ...found], ...(before === undefined ? {} : { needed: before }) };
 }
 
 function additionLines(
@@ -152,7 +167,8 @@ function isRight(work: DoseWork, made: Made): boolean {
  */
 export function doseSteps(work: DoseWork): readonly Step[] {
   const make = (digits: number): Made => {
-    const read = readingLines(work, digits);
+    const reading = readingLines(work, digits);
+    const read = withOxygen(work, reading, digits);
     const addition = additionLines(work, read.needed, digits);
     const made: Made = {
       lines: [...read.lines, ...addition.lines],

@@ -12,6 +12,7 @@ import { choicesFor } from './choices.ts';
 import { doseSteps } from './dose-steps.ts';
 import { fallbackWarnings } from './fallback-warning.ts';
 import { landing } from './landing.ts';
+import { oxygenLoss, SO2_PER_OXYGEN_MEASURED } from './oxygen-loss.ts';
 import { portionOf, type Portioned } from './portion.ts';
 import { redAmountWarnings } from './red-amount.ts';
 import type { DoseRequest } from './request.ts';
@@ -26,6 +27,7 @@ import {
 } from './shared-warnings.ts';
 import { FREE_NEED_HIGH_mg_L } from './thresholds.ts';
 import { smallnessWarnings } from './smallness-warnings.ts';
+import { startWarnings } from './start-warnings.ts';
 import { inOrder } from './warnings.ts';
 
 /**
@@ -66,7 +68,12 @@ export function dose(request: DoseRequest): DoseAnswer {
   const after = aim.add_mg_L === undefined ? {} : landing(request, aim.add_mg_L, aim.dose_mg_L ?? 0, pK);
   const warnings: Warning[] = [...factWarnings(request), ...basisWarnings(asked, dissociation)];
   if (target === undefined) {
-    warnings.push(...stageWarnings(request.stage), ...smellWarnings(now));
+    const standing = { ...freeOf(request), ...totalOf(request), ...now };
+    warnings.push(
+      ...stageWarnings(request.stage),
+      ...startWarnings(request.stage, standing),
+      ...smellWarnings(now),
+    );
   } else {
     warnings.push(...stageNotOverWarnings(request.stage));
     if (!request.stageStated) warnings.push({ code: 'stage-assumed', values: { stage: request.stage } });
@@ -103,6 +110,7 @@ export function dose(request: DoseRequest): DoseAnswer {
     ...portioned?.shown,
     ...after,
     ...ofMust,
+    ...bottlingOf(request, aim),
     ...(limit === undefined ? {} : { limit, limits: limitsOn(room) }),
     ...(cap === undefined ? {} : { capped: cap }),
     warnings: inOrder(warnings),
@@ -118,6 +126,19 @@ export function dose(request: DoseRequest): DoseAnswer {
   };
 }
 
+/** What oxygen takes at bottling, where it is stated. */
+function bottlingOf(request: DoseRequest, { target_free_mg_L }: Aim): Pick<DoseAnswer, 'bottling'> {
+  const { oxygen_mg_L } = request;
+  if (oxygen_mg_L === undefined) return {};
+  const counted_mg_L = oxygenLoss(request);
+  const least = oxygenLoss({ oxygen_mg_L, SO2_per_oxygen: SO2_PER_OXYGEN_MEASURED });
+  const after =
+    target_free_mg_L === undefined ? {} : { free_at_bottling_mg_L: target_free_mg_L - counted_mg_L };
+  return {
+    bottling: { oxygen_mg_L, loss_mg_L: [least, oxygenLoss({ oxygen_mg_L })], counted_mg_L, ...after },
+  };
+}
+
 /** An assumed target is only ever for wine whose fermentations are over. */
 function targetOf({ target, targetStated, stage }: DoseRequest): Target | undefined {
   return targetStated || !STAGES_WITHOUT_TARGET.includes(stage) ? target : undefined;
@@ -130,6 +151,9 @@ function withoutTarget(request: DoseRequest): DoseRequest {
 
 const freeOf = ({ free_mg_L }: DoseRequest): { free_mg_L?: number } =>
   free_mg_L === undefined ? {} : { free_mg_L };
+
+const totalOf = ({ total_mg_L }: DoseRequest): { total_mg_L?: number } =>
+  total_mg_L === undefined ? {} : { total_mg_L };
 
 const totalFromOf = ({ total_from }: DoseRequest): Pick<DoseRequest, 'total_from'> =>
   total_from === undefined ? {} : { total_from };

@@ -35,7 +35,7 @@ export function mustOf({ fruit_kg, yield_L_per_100_kg }: Fruit): number {
 /**
  * The line that finds the litres of must.
  *
- * @param fruit within `YIELD_BOUNDS`, as `mustOf` takes it
+ * @param fruit kg, above 0, and litres from 100 kg, from 20 to 100
  * @param digits significant digits
  *
  * @example

@@ -14,6 +14,7 @@ export interface LawFacts extends Pick<
   readonly total_from?: 'measured' | 'running-sum';
 }
 import type { Fruit } from './fruit.ts';
+import type { OxygenAtBottling } from './oxygen-loss.ts';
 import type { SolutionUse } from './solution-recipes.ts';
 
 /** What is known of the wine. Units stand in the names; every one may be unknown. */
@@ -30,7 +31,7 @@ export interface WineFacts extends LawFacts {
 }
 
 /** A question for a dose. */
-export interface DoseRequest extends WineFacts {
+export interface DoseRequest extends WineFacts, OxygenAtBottling {
   readonly volume_L?: number;
   /** The same volume as the person wrote it, so that the working shows it so; must be equal to `volume_L`. */
   readonly volume_display?: VolumeShown;

@@ -39,7 +39,10 @@ export function stockPerBarrel(
       const stock: Term = over(shown(printed_g ?? strength_SO2_g_per_100_mL, 'g', digits), HUNDRED_mL);
       const one = over(times(times(ONE_mL, stock), MG_PER_G), barrel);
       const whole = over(over(times(shown(rise_mg_L, 'mg/L'), barrel), MG_PER_G), stock);
-      return [line('added-by-one-mL', one, 'mg/L', digits), line('stock-for-a-barrel', whole, 'mL', digits)];
+      return [
+        line('added-by-one-millilitre', one, 'mg/L', digits),
+        line('stock-for-a-barrel', whole, 'mL', digits),
+      ];
     },
     ([, whole]) => printAlike(whole?.step.result.value ?? 0, additive_volume_mL, 3),
   );

@@ -19,6 +19,8 @@ export const WARNING_ORDER: readonly WarningCode[] = [
   'free-over-limit',
   'gas-too-little',
   'addition-large',
+  'malolactic-may-not-start',
+  'restart-may-fail',
   'must-may-hinder-malolactic',
   'free-needed-high',
   'molecular-above-2',

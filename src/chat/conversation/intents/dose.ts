@@ -13,6 +13,7 @@ import { factLines } from '../lines/facts.ts';
 import { isCapped, lawAssumedLines } from '../lines/capped.ts';
 import { firstOfDose, hasAmount } from '../lines/first-dose.ts';
 import { basisLines } from '../lines/basis.ts';
+import { bottlingLines } from '../lines/bottling.ts';
 import { bottledLines } from '../lines/bottled.ts';
 import { line } from '../lines/line.ts';
 import { mixedSampleLines } from '../lines/mixed-sample.ts';
@@ -87,6 +88,7 @@ function wholeDose(reading: Reading, request: DoseRequest, answer: DoseAnswer, t
           ...first.slice(1),
           ...shortLines(toBeWeighed(reading, answer), turn.here),
           ...condition,
+          ...bottlingLines(reading, answer, turn),
           ...expectationLines(reading, answer, otherArithmetic(request), manner),
           ...mixedSampleLines(reading),
           ...factLines(reading, manner),
@@ -159,6 +161,7 @@ function choice(reading: Reading, answer: DoseAnswer, turn: Turn): Outcome {
       ...choiceLines(reading, vessel, answer, additive, manner),
       ...underLines(answer.warnings, manner).filter(({ key }) => key !== 'warning-total-over-limit'),
       ...(reading.assumed.stage === undefined ? [] : [line('condition', 'condition-stage')]),
+      ...bottlingLines(reading, answer, turn),
       ...factLines(reading, manner),
       ...assumedLines(reading, manner),
       ...basisLines(reading, answer, manner),
@@ -182,6 +185,7 @@ function nothing(reading: Reading, answer: DoseAnswer, turn: Turn): Outcome {
     lines: [
       ...first,
       ...conditionLines(reading, answer, manner),
+      ...bottlingLines(reading, answer, turn),
       ...factLines(reading, manner),
       ...assumedLines(reading, manner),
       ...warningLines(answer.warnings, manner, 'warning', ['rounding-coarse']),

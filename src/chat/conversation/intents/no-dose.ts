@@ -9,6 +9,7 @@ import { afterMustLines, mustRangeLines } from '../lines/must.ts';
 import { questionLine } from '../lines/question.ts';
 import { vesselText } from '../lines/vessel.ts';
 import { wholeExample } from '../lines/whole-example.ts';
+import { warningLines } from '../lines/warnings.ts';
 import { molecularPerLitre } from '../manner.ts';
 import type { Outcome, Turn } from '../outcome.ts';
 
@@ -54,6 +55,10 @@ function noSulfiteNow(
       why,
       line('effect', 'no-dose-all-the-same', wholeExample(reading, turn.manner, turn.settings)),
       ...echo(reading, turn),
+      ...warningLines(answer.warnings, turn.manner, 'warning', [
+        'no-dose-at-this-stage',
+        'molecular-above-2',
+      ]),
     ],
     buttons: [],
     askedTarget: true,

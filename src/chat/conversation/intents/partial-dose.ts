@@ -6,6 +6,7 @@ import { missingInRound } from '../lines/missing-in-round.ts';
 import { assumedLines } from '../lines/assumed.ts';
 import { factLines } from '../lines/facts.ts';
 import { basisLines } from '../lines/basis.ts';
+import { bottlingLines } from '../lines/bottling.ts';
 import { bottledLines } from '../lines/bottled.ts';
 import { cappedFirst, isCapped, keptLine, limitValues, type Capped } from '../lines/capped.ts';
 import { givenAnswer } from '../lines/given-answer.ts';
@@ -36,6 +37,7 @@ export function partialDose(reading: Reading, request: DoseRequest, full: DoseAn
     lines: [
       ...(says ? [...bottledLines(reading), ...kept.slice(0, 1), ...under, ...kept.slice(1)] : question),
       ...condition,
+      ...(says && answer.bottling ? bottlingLines(reading, answer, turn) : []),
       ...(says ? question : []),
       ...factLines(reading, manner),
       ...assumedLines(reading, manner),

@@ -95,9 +95,7 @@ function changeOf(setting: Setting, settings: Settings): CellarSettings | undefi
     case 'basis':
       return { basis: setting.basis };
     case 'yield':
-      return setting.yield_L_per_100_kg === 'off'
-        ? {}
-        : { yield_L_per_100_kg: setting.yield_L_per_100_kg };
+      return setting.yield_L_per_100_kg === 'off' ? {} : { yield_L_per_100_kg: setting.yield_L_per_100_kg };
     case 'law':
       return { region: setting.region };
     case 'short-replies':
