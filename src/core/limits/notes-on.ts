@@ -40,7 +40,7 @@ function assumed(
 ): readonly LimitNote[] {
   const notes: LimitNote[] = [];
   const any = (is: (row: LimitRow) => boolean): boolean => chosen.some(({ row }) => is(row));
-  const isSplit = new Set(rows.map(({ sugar }) => JSON.stringify(sugar))).size > 1;
+  const isSplit = new Set(rows.map(({ sugar }) => sugar?.from_g_L ?? -(sugar?.to_g_L ?? 0))).size > 1;
   if (facts.sugar_g_L === undefined && isSplit) notes.push({ code: 'sugar-assumed' });
   if (facts.style === undefined && any((row) => row.styles !== undefined))
     notes.push({ code: 'colour-assumed' });

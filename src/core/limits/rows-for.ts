@@ -1,10 +1,18 @@
 import type { LimitFacts } from './limit-facts.ts';
 import type { Designation, LimitProduct, LimitRow } from './limit-row.ts';
 import { LIMIT_ROWS } from './limit-rows.ts';
-import type { Region } from './region.ts';
+import { REGIONS, type Region } from './region.ts';
 
 /** Sugar in g/L above which no wine is called dry (from memory: the most that the label rules of the EU and UK let pass). */
 const NEVER_DRY_ABOVE_g_L = 9;
+
+/** Found once, as every dose asks for them. */
+const ROWS_OF: ReadonlyMap<Region, readonly LimitRow[]> = new Map(
+  REGIONS.map((region) => [
+    region,
+    LIMIT_ROWS.filter((row) => row.region === region || (region === 'ca-qc' && row.region === 'ca')),
+  ]),
+);
 
 /**
  * The rows of a market that a wine may fall under by what it is, whatever its sugar and colour: in force or not.
@@ -17,7 +25,7 @@ const NEVER_DRY_ABOVE_g_L = 9;
  * ```
  */
 export function rowsOfRegion(region: Region): readonly LimitRow[] {
-  return LIMIT_ROWS.filter((row) => row.region === region || (region === 'ca-qc' && row.region === 'ca'));
+  return ROWS_OF.get(region) ?? [];
 }
 
 /**
