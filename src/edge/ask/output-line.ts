@@ -6,10 +6,11 @@ import type { Unasked } from '../serve-due.ts';
 
 /** What is told of a reading; how it was read in detail is no one's business outside. */
 function asUnderstood(reading: Reading, shared: Fields): object {
-  const { intent, topic, assumed, asks, problems, setAside } = reading;
+  const { intent, topic, titration, assumed, asks, problems, setAside } = reading;
   return {
     intent,
     ...(topic !== undefined && { topic }),
+    ...(titration !== undefined && { titration }),
     fields: without(shared, saidFields(reading)),
     assumed: { ...assumed, ...recalledFields(reading) },
     asks,
@@ -44,7 +45,10 @@ function asReply(said: Served['said']): object {
 }
 
 /** One answer as the line that a program reads: what was understood, the figures, the text, the buttons. */
-export function toOutputLine(id: string | number | null, { said, understood, answers, round }: Served): object {
+export function toOutputLine(
+  id: string | number | null,
+  { said, understood, answers, round }: Served,
+): object {
   const { readings = [], shared = {} } = understood ?? {};
   return {
     id,

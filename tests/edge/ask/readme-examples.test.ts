@@ -3,10 +3,17 @@ import { Readable, PassThrough } from 'node:stream';
 import { expect, test } from 'vitest';
 import { runAsk } from '../../../src/edge/ask/run-ask.ts';
 
-/** The blocks of `jsonl` in the README: a line in, and below it part of the line that comes out, as often as it likes. */
+/**
+ * The blocks of `jsonl` in the README: a line in, and below it part of the line that comes out, as often as it likes;
+ * `together`: lines in, and at the end part of what comes out of the last.
+ */
 const PAIRS = [...readFileSync('README.md', 'utf8').matchAll(/```jsonl( [^\n]*)?\n([\s\S]*?)```/g)].flatMap(
   ([, options = '', block = '']) => {
     const lines = block.trim().split('\n');
+    if (options.includes('together')) {
+      const line = lines.slice(0, -1).join('\n');
+      return [{ options: options.replace('together', '').trim(), line, shown: lines.at(-1) ?? '' }];
+    }
     return lines.flatMap((line, at) =>
       at % 2 === 0 ? [{ options: options.trim(), line, shown: lines[at + 1] ?? '' }] : [],
     );
@@ -39,5 +46,6 @@ test('the README has examples for scripts', () => {
 
 test.each(PAIRS)('README: $line', async ({ options, line, shown }) => {
   const args = ['--jsonl', ...options.split(' ').filter(Boolean)];
-  expect(JSON.parse(await ask(args, `${line}\n`))).toMatchObject(expected(shown) as object);
+  const out = await ask(args, `${line}\n`);
+  expect(JSON.parse(out.trim().split('\n').at(-1) ?? '')).toMatchObject(expected(shown) as object);
 });
