@@ -3,7 +3,7 @@ import { describe, expect, test } from 'vitest';
 import { localeMessages } from '../../.ci/locale-messages.ts';
 import { phrasesOf } from '../../src/chat/reader/spellings.ts';
 import { ALL_WORDS } from '../../src/chat/reader/words/all.ts';
-import { COMMON } from '../../src/chat/reader/words/common.ts';
+import { EVERYWHERE } from '../../src/chat/reader/words/everywhere.ts';
 import type { Words } from '../../src/chat/reader/words/words.ts';
 import { SPOKEN } from '../../src/chat/replies/spoken.ts';
 import { ownShares, shares } from './shared-words.ts';
@@ -43,7 +43,7 @@ const MAY_LACK = new Set([
 ]); // prettier-ignore
 
 function lacking(language: Words, all: readonly Words[]): string[] {
-  const has = new Set([...conceptsOf(language), ...Object.keys(COMMON).map((tag) => `says ${tag}`)]);
+  const has = new Set([...conceptsOf(language), ...Object.keys(EVERYWHERE).map((tag) => `says ${tag}`)]);
   const wanted = new Set(all.flatMap(conceptsOf));
   return [...wanted].filter((concept) => !has.has(concept) && !MAY_LACK.has(concept));
 }

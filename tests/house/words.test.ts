@@ -22,8 +22,12 @@ test('no file names a path of one machine, because the next machine does not hav
   expect(texts.flatMap(([path, text]) => found(MACHINE_PATH, path, text))).toEqual([]);
 });
 
+/** What other languages say: there `lecture` is a reading. */
+const OTHER_LANGUAGES = /(reader\/words|locales|tests\/messages)\/(es|fr|it|de|pt)\b/;
+
 test('no file speaks of anything but the project and its subject', () => {
-  expect(texts.flatMap(([path, text]) => found(FOREIGN, path, text))).toEqual([]);
+  const english = texts.filter(([path]) => !OTHER_LANGUAGES.test(path));
+  expect(english.flatMap(([path, text]) => found(FOREIGN, path, text))).toEqual([]);
 });
 
 test.each([

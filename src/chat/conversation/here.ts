@@ -19,7 +19,7 @@ import { readRoster, type Role, type Roster } from './cellar/roster.ts';
 import { FRESH_MEMORY, type Memory } from './memory.ts';
 import type { Claim, Plan } from './plan.ts';
 import type { IncomingMessage } from './ports.ts';
-import { languagesOf } from './language.ts';
+import { languagesOf } from './languages-of.ts';
 import { mergeSettings, type Settings } from './settings.ts';
 
 /** What is known of the vessels that a message is about. */

@@ -3,7 +3,7 @@ import type { StockEvent } from '../../core/cellar/entry.ts';
 import type { SaidDay, SaidWhen as SaidMoment } from '../../core/time/said-when.ts';
 import type { Region } from '../../core/limits/region.ts';
 import type { Basis } from '../../core/wine.ts';
-import type { Language } from './understood.ts';
+import type { Language } from './words/languages.ts';
 
 /** A moment as it was said, with the person's own words. */
 export interface SaidWhen extends SaidMoment {

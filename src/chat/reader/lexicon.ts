@@ -3,7 +3,7 @@ import { phrasesOf } from './spellings.ts';
 import { tellLanguages } from './tell-languages.ts';
 import type { Language } from './understood.ts';
 import { ALL_WORDS } from './words/all.ts';
-import { COMMON } from './words/common.ts';
+import { EVERYWHERE } from './words/everywhere.ts';
 import type { OwnWordId, Tag, Words } from './words/words.ts';
 
 /** What is known of a word or phrase: its tags. */
@@ -105,10 +105,10 @@ function ownOf(lists: readonly Words[]): Map<string, OwnPhrase[]> {
  * ```
  */
 export function buildLexicon(lists: readonly Words[], { names = [], isTold = true }: Making = {}): Lexicon {
-  const phrases = new Map<string, { readonly tags: Tag[]; readonly of: Language | 'common' | 'names' }>();
+  const phrases = new Map<string, { readonly tags: Tag[]; readonly of: Language | 'everywhere' | 'names' }>();
   const longest = new Map<string, number>();
   const neverMended = new Set(lists.flatMap((list) => list.neverMended ?? []));
-  const add = (phrase: string, tag: Tag, of: Language | 'common' | 'names'): void => {
+  const add = (phrase: string, tag: Tag, of: Language | 'everywhere' | 'names'): void => {
     const entry = phrases.get(phrase);
     if (entry) {
       if (entry.of === of && !entry.tags.includes(tag)) entry.tags.push(tag);
@@ -127,9 +127,9 @@ export function buildLexicon(lists: readonly Words[], { names = [], isTold = tru
   }
   // English has all of it, with meanings of its own (`k`, `bar`).
   if (lists[0] !== undefined && lists[0].language !== 'en')
-    for (const [tag, entries] of Object.entries(COMMON) as [Tag, readonly string[]][])
+    for (const [tag, entries] of Object.entries(EVERYWHERE) as [Tag, readonly string[]][])
       for (const phrase of entries)
-        if (phrases.get(phrase)?.of !== lists[0].language) add(phrase, tag, 'common');
+        if (phrases.get(phrase)?.of !== lists[0].language) add(phrase, tag, 'everywhere');
   for (const list of names) {
     const { says } = list;
     for (const [tag, entries] of Object.entries(says) as [Tag, readonly string[]][]) {

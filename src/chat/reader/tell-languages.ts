@@ -1,7 +1,7 @@
 import { phrasesOf } from './spellings.ts';
 import type { Language } from './understood.ts';
 import { ALL_WORDS } from './words/all.ts';
-import { COMMON } from './words/common.ts';
+import { EVERYWHERE } from './words/everywhere.ts';
 import type { Tag, Words } from './words/words.ts';
 
 /** In which languages a message is written. */
@@ -40,7 +40,7 @@ function languagesOfWords(lists: readonly Words[]): ReadonlyMap<string, number> 
     for (const entries of Object.values(own)) add(entries, talk);
     add(neverMended, name);
   }
-  for (const entries of Object.values(COMMON)) for (const entry of entries) known.delete(entry);
+  for (const entries of Object.values(EVERYWHERE)) for (const entry of entries) known.delete(entry);
   return known;
 }
 
@@ -91,7 +91,8 @@ export function tellLanguages(text: string, chat: Language): ToldLanguages {
   };
   const scores = ALL_WORDS.map(({ language }, n) => ({ language, n, score: scoreOf(n, 0) }));
   const own = scores.find(({ language }) => language === chat);
-  const best = scores.reduce((a, b) => (b.score > a.score + 1e-9 ? b : a), own ?? scores[0]!);
+  let best = own ?? { language: chat, n: 0, score: 0 };
+  for (const one of scores) if (one.score > best.score + 1e-9) best = one;
   // One short word may be anything: a name, a slip.
   const isMissing = (n: number): boolean => {
     const only = new Set(

@@ -50,10 +50,8 @@ test('it is told by its words in a chat of another language', () => {
   expect(fieldsOf('afegits 40 g de metabisulfit al dipòsit 3', 'en')).toMatchObject({ intent: 'added' });
 });
 
-const say = makeSay({
-  ...loadLocales(),
-  ...{ ca: readFileSync(new URL('ca.ftl', import.meta.url), 'utf8') },
-});
+const catalan: object = { ca: readFileSync(new URL('ca.ftl', import.meta.url), 'utf8') };
+const say = makeSay({ ...loadLocales(), ...catalan });
 
 test('it is answered by its locale, said once, with a button to stay', async () => {
   const talk = startTalk();

@@ -16,6 +16,7 @@ import {
 import { isCellarTalk } from '../cellar-talk.ts';
 import { MOST_UNLABELLED_FREE_mg_L } from '../finders/keep-labelled.ts';
 import { isPhLike } from '../ph-like.ts';
+import { holdsUnknownVerb, isNegated, isOfUnknown, speaksOfAdding } from './unsaid.ts';
 import { isStranger, strangerBefore } from '../stranger.ts';
 import { concentrationAt, mg_L_IN } from '../units.ts';
 
@@ -82,27 +83,6 @@ function findPh(board: Board, candidates: readonly number[]): void {
   board.notes.push({ id: 'ph-unlabelled', text: placeOf(board, i, i).text });
   find(board, 'ph', decimalAt(board, i).value, 'bare', i, i);
 }
-
-/** Words that say that something was or is to be added: then a figure that nothing names is no reading. */
-const speaksOfAdding = (board: Board): boolean =>
-  board.lexicon.language !== 'en' &&
-  board.terms.some((_, i) =>
-    (['past', 'past-if-accented', 'add', 'add-behind', 'raise'] as const).some((cue) => isCue(board, i, cue)),
-  );
-
-/** A word in small letters that no list knows: in a language that is not read in full it may be the verb. */
-const holdsUnknownVerb = (board: Board): boolean =>
-  (board.lexicon.language !== 'en' || !board.lexicon.isTold) &&
-  board.terms.some(
-    (_, i) =>
-      isStranger(board, i) && termAt(board, i).text.length > 3 && /^\p{Ll}/u.test(placeOf(board, i, i).text),
-  );
-
-/** `1 livre de méta`: the word behind a figure, in a language whose every unit nobody has listed. */
-const isOfUnknown = (board: Board, i: number | undefined): boolean =>
-  i !== undefined && board.lexicon.language !== 'en' && isStranger(board, i + 1);
-
-const isNegated = ({ notes }: Board): boolean => notes.some(({ id }) => id === 'negated');
 
 function findFree(board: Board, candidates: readonly number[]): void {
   const left = candidates.filter((i) => isFree(board, i));
