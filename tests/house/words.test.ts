@@ -22,7 +22,7 @@ test('no file names a path of one machine, because the next machine does not hav
   expect(texts.flatMap(([path, text]) => found(MACHINE_PATH, path, text))).toEqual([]);
 });
 
-/** What other languages say: there `lecture` is a reading. */
+/** Other languages have such words for other things: a reading, a price. */
 const OTHER_LANGUAGES = /(reader\/words|locales|tests\/messages)\/(es|fr|it|de|pt)\b/;
 
 test('no file speaks of anything but the project and its subject', () => {
