@@ -9,6 +9,7 @@ import { makeServe } from '../../src/edge/serve-message.ts';
 import { createMemoryCellars } from '../../src/edge/store/memory-cellars.ts';
 import { say } from '../fuzz/say.ts';
 import { writtenMessages } from '../fuzz/written-messages.ts';
+import { timeForecast } from './forecast-round.ts';
 import { HARD_TEXTS } from './hard-texts.ts';
 import { runAsk } from './programs.ts';
 import { timeLargeCellar } from './large-cellar.ts';
@@ -95,6 +96,8 @@ for (const [name, text] of HARD_TEXTS) hard.push([name, await read(text)]);
 hard.sort(([, a], [, b]) => b - a);
 row(`reading ${hard.length} texts of 4,096 characters, median`, ms(median(hard.map(([, time]) => time))));
 for (const [name, time] of hard.slice(0, 3)) row(`… ${name}`, ms(time), 'at most 5 ms');
+
+row('forecast over 10,000 readings', ms(await timeForecast()), 'under 20 ms');
 
 const starts: number[] = [];
 for (let i = 0; i < 7; i += 1) starts.push((await runAsk([TYPICAL])).milliseconds);
