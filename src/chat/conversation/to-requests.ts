@@ -67,10 +67,10 @@ function volumeOf({
 
 /** What is known of the wine; the law of the market is the cellar's. */
 /** The oxygen that is allowed for at bottling. */
-function oxygenIn({ marks: { oxygen_mg_L, SO2_per_oxygen } }: Reading): OxygenAtBottling {
+function oxygenIn({ marks: { oxygen_mg_L, SO2_mg_per_mg_O2 } }: Reading): OxygenAtBottling {
   return {
     ...(oxygen_mg_L !== undefined && { oxygen_mg_L }),
-    ...(SO2_per_oxygen !== undefined && { SO2_per_oxygen }),
+    ...(SO2_mg_per_mg_O2 !== undefined && { SO2_mg_per_mg_O2 }),
   };
 }
 

@@ -151,7 +151,7 @@ export interface Marks {
   bottling?: true;
   /** Oxygen at bottling, dissolved and in the headspace, mg/L; and mg of SO2 that one of it takes, where it is said. */
   oxygen_mg_L?: number;
-  SO2_per_oxygen?: number;
+  SO2_mg_per_mg_O2?: number;
   /** A cask without a usual size was named. */
   casksWithoutSize?: true;
   solutionUse?: 'holding' | 'cleaning' | 'make-up';

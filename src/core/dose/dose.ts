@@ -131,7 +131,7 @@ function bottlingOf(request: DoseRequest, { target_free_mg_L }: Aim): Pick<DoseA
   const { oxygen_mg_L } = request;
   if (oxygen_mg_L === undefined) return {};
   const counted_mg_L = oxygenLoss(request);
-  const least = oxygenLoss({ oxygen_mg_L, SO2_per_oxygen: SO2_PER_OXYGEN_MEASURED });
+  const least = oxygenLoss({ oxygen_mg_L, SO2_mg_per_mg_O2: SO2_PER_OXYGEN_MEASURED });
   const after =
     target_free_mg_L === undefined ? {} : { free_at_bottling_mg_L: target_free_mg_L - counted_mg_L };
   return {

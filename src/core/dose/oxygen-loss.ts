@@ -10,7 +10,7 @@ export interface OxygenAtBottling {
   /** Dissolved and in the headspace, mg/L of wine. */
   readonly oxygen_mg_L?: number;
   /** mg of SO2 for 1 mg of oxygen; by the formula where nobody has another figure. */
-  readonly SO2_per_oxygen?: number;
+  readonly SO2_mg_per_mg_O2?: number;
 }
 
 /** Two molecules of SO2 for one of oxygen: mg SO2 for 1 mg O2 (standard atomic weights). */
@@ -31,15 +31,15 @@ export const SO2_PER_OXYGEN_BOUNDS = { min: 1, max: 5 } as const;
  * @example
  * ```ts
  * oxygenLoss({ oxygen_mg_L: 2 }) // => 8.008
- * oxygenLoss({ oxygen_mg_L: 2, SO2_per_oxygen: 2.5 }) // => 5
+ * oxygenLoss({ oxygen_mg_L: 2, SO2_mg_per_mg_O2: 2.5 }) // => 5
  * oxygenLoss({}) // => 0
  * ```
  */
-export function oxygenLoss({ oxygen_mg_L, SO2_per_oxygen }: OxygenAtBottling): number {
+export function oxygenLoss({ oxygen_mg_L, SO2_mg_per_mg_O2 }: OxygenAtBottling): number {
   const action = 'allow for oxygen';
-  const each = SO2_per_oxygen ?? SO2_PER_OXYGEN_BY_FORMULA;
+  const each = SO2_mg_per_mg_O2 ?? SO2_PER_OXYGEN_BY_FORMULA;
   assertWithinBounds(action, 'oxygen_mg_L', oxygen_mg_L);
-  assertBetween(action, 'SO2_per_oxygen', each, SO2_PER_OXYGEN_BOUNDS.min, SO2_PER_OXYGEN_BOUNDS.max);
+  assertBetween(action, 'SO2_mg_per_mg_O2', each, SO2_PER_OXYGEN_BOUNDS.min, SO2_PER_OXYGEN_BOUNDS.max);
   return (oxygen_mg_L ?? 0) * each;
 }
 
@@ -57,10 +57,10 @@ export function oxygenLoss({ oxygen_mg_L, SO2_per_oxygen }: OxygenAtBottling): n
  * ```
  */
 export function oxygenLines(oxygen: OxygenAtBottling, after: Term, digits: number): readonly Line[] {
-  const { oxygen_mg_L = 0, SO2_per_oxygen } = oxygen;
+  const { oxygen_mg_L = 0, SO2_mg_per_mg_O2 } = oxygen;
   if (oxygen_mg_L === 0) return [];
-  const each = number(SO2_per_oxygen ?? SO2_PER_OXYGEN_BY_FORMULA, digits);
-  const source = SO2_per_oxygen === undefined ? 'ciaaw-2021' : 'as-stated';
+  const each = number(SO2_mg_per_mg_O2 ?? SO2_PER_OXYGEN_BY_FORMULA, digits);
+  const source = SO2_mg_per_mg_O2 === undefined ? 'ciaaw-2021' : 'as-stated';
   const loss = line('oxygen-loss', times(shown(oxygen_mg_L, 'mg/L', digits), each), 'mg/L', digits, source);
   return [loss, line('free-before-bottling', plus(after, loss.result), 'mg/L', digits)];
 }

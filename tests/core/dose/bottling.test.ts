@@ -22,7 +22,7 @@ describe('what oxygen takes at bottling', () => {
   test.each([
     [{}, 0],
     [{ oxygen_mg_L: 0 }, 0],
-    [{ oxygen_mg_L: 2, SO2_per_oxygen: 2.5 }, 5],
+    [{ oxygen_mg_L: 2, SO2_mg_per_mg_O2: 2.5 }, 5],
   ])('%j: %d mg/L', (oxygen, SO2) => {
     expect(oxygenLoss(oxygen)).toBe(SO2);
   });
@@ -31,8 +31,8 @@ describe('what oxygen takes at bottling', () => {
     { oxygen_mg_L: -0.1 },
     { oxygen_mg_L: 20.1 },
     { oxygen_mg_L: Number.NaN },
-    { oxygen_mg_L: 2, SO2_per_oxygen: 0.9 },
-    { oxygen_mg_L: 2, SO2_per_oxygen: 5.1 },
+    { oxygen_mg_L: 2, SO2_mg_per_mg_O2: 0.9 },
+    { oxygen_mg_L: 2, SO2_mg_per_mg_O2: 5.1 },
   ])('%j is refused', (oxygen) => {
     expect(() => oxygenLoss(oxygen)).toThrow(RangeError);
   });
@@ -58,7 +58,7 @@ describe('a dose before bottling', () => {
 
   test.each([
     BOTTLING,
-    { ...BOTTLING, SO2_per_oxygen: 2.5 },
+    { ...BOTTLING, SO2_mg_per_mg_O2: 2.5 },
     { ...BOTTLING, target: { free_mg_L: 30 }, targetStated: true },
     { ...BOTTLING, binding_allowance_percent: 30 },
     { ...BOTTLING, vessels: 4 },

@@ -27,7 +27,7 @@ export function bottlingLines(reading: Reading, answer: DoseAnswer, turn: Turn):
     unit,
     oxygen: numberText(bottling.oxygen_mg_L, 2, mark),
     loss: said(bottling.counted_mg_L),
-    each: marks.SO2_per_oxygen === undefined ? 'formula' : numberText(marks.SO2_per_oxygen, 1, mark),
+    each: marks.SO2_mg_per_mg_O2 === undefined ? 'formula' : numberText(marks.SO2_mg_per_mg_O2, 1, mark),
   };
   const after = bottling.free_at_bottling_mg_L;
   if (after === undefined || now === undefined) return [line('condition', 'bottling-takes', values)];
@@ -41,8 +41,8 @@ export function bottlingLines(reading: Reading, answer: DoseAnswer, turn: Turn):
 /** What would do if oxygen takes no more than trade figures have it. */
 function measuredLines(reading: Reading, { manner, settings }: Turn): Line[] {
   const request = toDoseRequest(reading, settings);
-  if (request.oxygen_mg_L === 0 || request.SO2_per_oxygen !== undefined) return [];
-  const measured = dose({ ...request, SO2_per_oxygen: SO2_PER_OXYGEN_MEASURED });
+  if (request.oxygen_mg_L === 0 || request.SO2_mg_per_mg_O2 !== undefined) return [];
+  const measured = dose({ ...request, SO2_mg_per_mg_O2: SO2_PER_OXYGEN_MEASURED });
   const { dose_mg_L, bottling } = measured;
   if (dose_mg_L === undefined || bottling === undefined) return [];
   const bare = bareAmount(measureIn(measured), measured.per_vessel ? 'several' : 'one', manner);

@@ -15,7 +15,7 @@ function findFactor(board: Board, i: number): number {
   const { value } = figureAt(board, i + 1);
   const { min, max } = SO2_PER_OXYGEN_BOUNDS;
   if (!(value >= min && value <= max)) refuse(board, 'value-out-of-range', i, i + 1);
-  else board.marks.SO2_per_oxygen = value;
+  else board.marks.SO2_mg_per_mg_O2 = value;
   return i + 1;
 }
 
