@@ -1146,7 +1146,7 @@ round-open =
         [one] No amount for one:
        *[other] No amount for { $count }:
     }
-round-open-more = … and { $count } more: send “round”.
+round-open-names = No amount for { $list }: send “round” to see why.
 round-more = … and { $count } more: send “round”, or take the sheet below.
 round-and-more = { $count } more
 round-warned = ⚠ Warnings stand beside { $list }: send “round”.
@@ -1217,6 +1217,7 @@ round-not-understood =
         [none] One line I could not read.
        *[other] “{ $about }” I could not read.
     }
+round-effect-short = A third to a half usually binds: measure tomorrow.
 round-effect = A third to a half of an addition usually binds: measure tomorrow. For a vessel’s working send its line alone.
 choice-additive = { $value ->
         [potassium-metabisulfite] Potassium metabisulfite
@@ -2075,12 +2076,12 @@ stock-corrected =
 stock-not-kept = Nothing of it is noted in store yet, so nothing is drawn. Count it: stock kmbs 3.2 kg
 stock-lacks =
     { $what ->
-        [additive] Which additive? Write it: received 25 kg kmbs; also smbs, 6% so2
-        [strength] Which strength has the { additive }? Write it: received 10 L of 6% so2
-        [size] Tablets of how many grams? Write it: received 50 tablets 5 g
-        [volume] Additions of { additive } are measured by volume. Write it in litres: received 10 L of 6% so2
-        [one] One additive a message: received 25 kg kmbs
-       *[amount] How much { additive }? Write it with its unit: { $event ->
+        [additive] Which additive? Write: received 25 kg kmbs
+        [strength] Which strength has the { additive }? Write: received 10 L of 6% so2
+        [size] Tablets of how many grams? Write: received 50 tablets 5 g
+        [volume] Additions of { additive } are measured by volume. Write: received 10 L of 6% so2
+        [one] One additive a message. Write: received 25 kg kmbs
+       *[amount] How much { additive }, and in what unit? Write: { $event ->
             [counted] stock kmbs 3.2 kg
             [used] used 200 g kmbs for rinsing
             [discarded] discarded 1 kg kmbs

@@ -778,6 +778,7 @@ export interface SentenceValues {
   'round-dose-bare':
     'additive' | 'all' | 'amount' | 'limited' | 'red' | 'redAmount' | 'strength' | 'tablet' | 'unit' | 'vessel';
   'round-effect': never;
+  'round-effect-short': never;
   'round-for-all': 'list';
   'round-gone': never;
   'round-head': 'additive' | 'kind' | 'size';
@@ -801,7 +802,7 @@ export interface SentenceValues {
   'round-nothing-bare': 'vessel';
   'round-of': 'additive' | 'strength';
   'round-open': 'count';
-  'round-open-more': 'count';
+  'round-open-names': 'list';
   'round-percent': 'strength';
   'round-pick': 'all' | 'from' | 'to';
   'round-pick-noted': 'entry' | 'vessel';
