@@ -5,7 +5,7 @@ import type { Button, Line, Reply } from '../replies/reply.ts';
 import { answerReading } from './answer-reading.ts';
 import { buttonsFor } from './buttons.ts';
 import type { RoundSheet } from '../attachments/round/round-sheet.ts';
-import { roundBody } from './lines/round-body.ts';
+import { roundBody, roundFootShown } from './lines/round-body.ts';
 import { roundFoot, type SaidInRound } from './lines/round-foot.ts';
 import { shortLines } from './lines/stock.ts';
 import { roundHead } from './lines/round-head.ts';
@@ -76,7 +76,7 @@ export function answerRound(understood: Understood, here: Here): Handled {
               ...roundBody(sheet, isCautioning(said)),
               ...roundTotals(sheet.rows).flatMap((total) => shortLines(total, here)),
               ...otherLines(said),
-              ...foot,
+              ...roundFootShown(sheet),
             ],
             buttons,
           },

@@ -92,6 +92,16 @@ test('a round of 30 vessels is one screen; asked for, it comes in messages of a 
   expect(answers).toHaveLength(30);
 });
 
+test('a long round with lines that have no amount is one screen too, and names them', async () => {
+  const lines = Array.from(
+    { length: 24 },
+    (_, at) => `T${at + 1} ${10 + at} hl pH ${at % 7 === 3 ? '36' : '3.4'} free ${10 + (at % 9)}`,
+  );
+  const screen = textOf(await startTalk().write(lines.join('\n')));
+  expect(rowsOf(screen, PHONE_COLUMNS)).toBeLessThanOrEqual(MOST_ROWS);
+  expect(screen.split('\n')[1]).toBe('No amount for T4, T11, T18: send “round” to see why.');
+});
+
 test.each([
   ['metric', 'g potassium metabisulfite per hL', '1 450 L'],
   ['us', 'per 1 000 gal', '1 450 gal (5 489 L)'],

@@ -10,9 +10,7 @@ import { line, listLine, part } from './line.ts';
 export const WHOLE_ROUND = 12;
 
 /** Rows of a longer round that its reply has room for, beside the totals, the problems and the cautions. */
-const ROOM = { cautioned: 12, fresh: 7 } as const;
-const FEWEST_ROWS = 3;
-const MOST_OPEN = 4;
+const ROOM = { cautioned: 9, fresh: 4 } as const;
 const MOST_NAMES = 8;
 
 /** The rows of a round and its totals, what has no amount apart, as far as one screen has room for them. */
@@ -23,21 +21,27 @@ export function roundBody(
   const open = rows.filter(({ is }) => is === 'open');
   const done = rows.filter(({ is }) => is !== 'open');
   if (rows.length <= WHOLE_ROUND)
-    return [...head, ...linesOf(done), ...totalLines(rows, mark), ...openLines(open, open.length)];
-  const shownOpen = Math.min(open.length, MOST_OPEN);
-  const room = ROOM[hasFullCautions ? 'fresh' : 'cautioned'] - 2 * shownOpen;
-  const shown = done.slice(0, Math.max(FEWEST_ROWS, room));
+    return [...head, ...linesOf(done), ...totalLines(rows, mark), ...openLines(open)];
+  const shown = done.slice(0, ROOM[hasFullCautions ? 'fresh' : 'cautioned']);
   const warned = done.slice(shown.length).filter(({ lines }) => lines.some(isWarning));
   return [
     ...totalLines(rows, mark),
-    ...openLines(open, shownOpen),
+    ...(open.length === 1 ? openLines(open) : namesLine('first', 'round-open-names', open)),
     ...head,
     ...linesOf(shown),
     ...(done.length > shown.length
       ? [line('first', 'round-more', { count: String(done.length - shown.length) })]
       : []),
-    ...warnedLine(warned),
+    ...namesLine('caution', 'round-warned', warned),
   ];
+}
+
+/** What stands under a round: under a long one, whose names were said above, in fewer words. */
+export function roundFootShown({ rows, foot }: Pick<RoundSheet, 'rows' | 'foot'>): Line[] {
+  if (rows.length <= WHOLE_ROUND) return [...foot];
+  return foot
+    .filter(({ key }) => key !== 'round-again')
+    .map((one) => (one.key === 'round-effect' ? line(one.room, 'round-effect-short') : one));
 }
 
 const isWarning = ({ key }: Line): boolean => key.startsWith('warning-');
@@ -48,21 +52,21 @@ export function linesOf(rows: readonly RoundRow[]): Line[] {
 }
 
 /** What has no amount, under a heading of its own: nothing of it is in the totals. */
-function openLines(open: readonly RoundRow[], shown: number): Line[] {
+function openLines(open: readonly RoundRow[]): Line[] {
   if (open.length === 0) return [];
-  const rest = open.length - shown;
-  return [
-    line('first', 'round-open', { count: open.length === 1 ? 'one' : String(open.length) }),
-    ...linesOf(open.slice(0, shown)),
-    ...(rest > 0 ? [line('first', 'round-open-more', { count: String(rest) })] : []),
-  ];
+  const count = open.length === 1 ? 'one' : String(open.length);
+  return [line('first', 'round-open', { count }), ...linesOf(open)];
 }
 
-/** Vessels whose line has no room here, and a warning. */
-function warnedLine(warned: readonly RoundRow[]): Line[] {
-  const names = warned.slice(0, MOST_NAMES).map(({ name }) => part('round-name', { name }));
-  const rest = warned.length - names.length;
-  return listLine('caution', 'round-warned', [
+/** Rows by their names, where their lines have no room. */
+function namesLine(
+  room: 'first' | 'caution',
+  key: 'round-open-names' | 'round-warned',
+  rows: readonly RoundRow[],
+): Line[] {
+  const names = rows.slice(0, MOST_NAMES).map(({ name }) => part('round-name', { name }));
+  const rest = rows.length - names.length;
+  return listLine(room, key, [
     ...names,
     ...(rest > 0 ? [part('round-and-more', { count: String(rest) })] : []),
   ]);
