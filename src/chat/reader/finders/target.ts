@@ -9,6 +9,9 @@ import { aimAt, isArrow, keepAddition, keepTarget, kindAt, skipJoins } from './a
 /** The figure that a verb at term `i` governs: `add 28 ppm`, `target free 35`; and whether "to" leads to it. */
 function governed(board: Board, i: number): { aim: Aim; label?: Aim['kind']; leadsTo: boolean } | undefined {
   let k = skipJoins(board, i + 1);
+  // `before adding: free 18`: behind a colon a label begins anew.
+  const isApart = isCue(board, i, 'add') && isMark(board, i + 1, ':');
+  if (isApart && kindAt(board, k) !== undefined) return undefined;
   const label = kindAt(board, k) ?? (hasTag(board, k, 'label:so2') ? 'free' : undefined);
   if (label !== undefined) k = skipJoins(board, k + 1);
   const aim = aimAt(board, k);
