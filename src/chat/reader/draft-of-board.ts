@@ -1,6 +1,6 @@
 import type { Stage } from '../../core/wine.ts';
 import type { Board, Finding } from './board.ts';
-import { findingOf, holdsCue, placeOf } from './board.ts';
+import { findingOf, holdsCue, isCue, placeOf } from './board.ts';
 import { USUAL_BARREL_L } from './finders/barrels.ts';
 import { mostCautious } from './finders/stage.ts';
 import type { Draft, FieldName, Fields, Intent, Place } from './understood.ts';
@@ -35,6 +35,22 @@ function shareVolume(board: Board, fields: Record<string, unknown>): void {
   }
 }
 
+/** What may be said of each of several vessels. */
+const AMOUNTS = ['mass_g', 'additive_volume_mL', 'tablets'] as const;
+
+/** `10 g kmbs each B1-B6`: the amount is of each vessel, and as a volume does it stands for all of them. */
+function shareAmount(board: Board, fields: Record<string, unknown>): void {
+  const vessels = findingOf(board, 'vessels')?.value;
+  if (vessels === undefined) return;
+  for (const field of AMOUNTS) {
+    const place = findingOf(board, field);
+    if (place === undefined) continue;
+    const isBeside = [1, 2, 3].some((k) => isCue(board, place.to + k, 'each'));
+    const isAlone = findingOf(board, 'volume_L') === undefined && holdsCue(board, 'each');
+    if (isBeside || isAlone) fields[field] = place.value * vessels.length;
+  }
+}
+
 function fieldsOf(board: Board): Fields {
   const fields: Record<string, unknown> = {};
   for (const { field, value } of board.findings) if (field !== 'stage') fields[field] ??= value;
@@ -44,6 +60,7 @@ function fieldsOf(board: Board): Fields {
   const stage = mostCautious(stages);
   if (stage) fields['stage'] = stage;
   shareVolume(board, fields);
+  shareAmount(board, fields);
   return fields;
 }
 
