@@ -38,6 +38,10 @@ describe.each(TOPICS)('help %s', (topic) => {
   });
 });
 
+test('every topic that there are words for has sentences', () => {
+  expect(Object.keys(en.topics ?? {}).filter((topic) => !TOPICS.includes(topic))).toEqual([]);
+});
+
 test('help is one screen, and lists each topic there is', async () => {
   const text = textOf(await startTalk().write('help'));
   expect(rowsOf(text)).toBeLessThanOrEqual(16);

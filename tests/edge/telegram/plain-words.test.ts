@@ -9,6 +9,8 @@ test.each([
   ['/START@a_cellar_bot', 'help'],
   ['/help', 'help'],
   ['/help@a_cellar_bot', 'help'],
+  ['/help law', 'help law'],
+  ['/help@a_cellar_bot law', 'help law'],
   ['/T4 1450 gal\npH 3.58', 'T4 1450 gal\npH 3.58'],
   ['T4 1450 gal', 'T4 1450 gal'],
   ['/', '/'],
