@@ -2104,6 +2104,7 @@ titration-result = { $vessel ->
     [aeration] aeration–oxidation
    *[other] iodine
 }.
+titration-too-much = More than wines hold: check the sample, the burette and the titrant’s strength. It is not kept.
 titration-molar = { $molar } M iodine is { $normal } N: one mole takes up twice.
 titration-ascorbic-asked = Iodine counts ascorbic acid too: { $amount } mg/L of it reads as +{ $counts } { $unit }. If there is any, add “ascorbic { $amount }”.
 titration-precision = Two results of one wine may differ by { $again } in one lab, by { $other } between two (published).
@@ -2147,7 +2148,10 @@ range-dose = { $vessel ->
    *[other] { $vessel }: as
 } a range (95 %): { $amount ->
     [none] { $low }–{ $high } { $unit } SO2
-   *[other] { $amount }, that is { $low }–{ $high } { $unit } SO2
+   *[other] { $amount }{ $count ->
+        [several] {" "}in all
+       *[one] {""}
+    }, that is { $low }–{ $high } { $unit } SO2
 }.
 range-sure = After the dose you can be sure of { $molecular } { $unit } molecular, if what binds is as reckoned.
 range-rests = Rests on pH ± { $ph } and free ± { $free } { $unit }{ $said ->

@@ -35,6 +35,14 @@ export function resultOf({ free_mg_L, total_mg_L }: TitrationAnswer): number {
   return Math.round((free_mg_L ?? total_mg_L ?? 0) * 10) / 10;
 }
 
+/** More SO2 than any wine holds, mg/L (own thresholds): a volume or a strength was misread. */
+const MOST_mg_L = { free: 200, total: 500 } as const;
+
+/** Whether a result is more than any wine holds: it is told, and never kept. */
+export function isTooMuch(answer: TitrationAnswer): boolean {
+  return resultOf(answer) > (answer.free_mg_L === undefined ? MOST_mg_L.total : MOST_mg_L.free);
+}
+
 /** The answer to a titration that was told; undefined while something is missing. */
 export function titrationOf(said: SaidTitration): TitrationAnswer | undefined {
   const titration = toTitration(said);

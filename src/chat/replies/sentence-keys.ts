@@ -743,7 +743,7 @@ export interface SentenceValues {
   'question-which-yield': never;
   'question-which-yield-next': never;
   'question-which-yield-why': never;
-  'range-dose': 'amount' | 'high' | 'low' | 'unit' | 'vessel';
+  'range-dose': 'amount' | 'count' | 'high' | 'low' | 'unit' | 'vessel';
   'range-nothing': never;
   'range-rests': 'free' | 'ph' | 'said' | 'unit';
   'range-sure': 'molecular' | 'unit';
@@ -995,6 +995,7 @@ export interface SentenceValues {
   'titration-sample': 'volume';
   'titration-strength': 'strength' | 'unit';
   'titration-titrant': 'volume';
+  'titration-too-much': never;
   'too-fast': never;
   'too-much-air': 'each' | 'high' | 'low';
   'too-much-blend': 'vessel';

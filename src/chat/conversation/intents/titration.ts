@@ -9,7 +9,7 @@ import { resultLine, titrationAssumed, titrationFacts, titrationMeaning } from '
 import { workingLines } from '../lines/working.ts';
 import { redToldKey } from '../keys.ts';
 import type { Outcome, Turn } from '../outcome.ts';
-import { gapOf, resultOf, titrationOf, toTitration } from '../to-titration.ts';
+import { gapOf, isTooMuch, resultOf, titrationOf, toTitration } from '../to-titration.ts';
 
 /** A titration: what it comes to, what that means, and for a vessel one tap that keeps it; nothing is kept before. */
 export function answerTitration(reading: Reading, turn: Turn): Outcome {
@@ -26,6 +26,7 @@ export function answerTitration(reading: Reading, turn: Turn): Outcome {
     inRound: [first],
     lines: [
       first,
+      ...(isTooMuch(answer) ? [line('first', 'titration-too-much')] : []),
       ...titrationMeaning(said, titration, answer, manner),
       ...high,
       ...(vessel === undefined ? [line('question', 'titration-name-vessel')] : []),
@@ -34,7 +35,7 @@ export function answerTitration(reading: Reading, turn: Turn): Outcome {
       ...assumedLines(reading, manner),
       ...workingLines(answer.steps, manner),
     ],
-    buttons: vessel === undefined || here.role === 'guest' ? [] : buttonsFor(ref, ['k']),
+    buttons: vessel === undefined || here.role === 'guest' || isTooMuch(answer) ? [] : buttonsFor(ref, ['k']),
     ...(high.length > 0 &&
       vessel !== undefined && { keeps: [{ kind: 'keep', key: redToldKey(vessel), text: '1' } as const] }),
   };

@@ -15,6 +15,7 @@ export function withRange(reading: Reading, outcome: Outcome, { settings, manner
     (reading.marks.wantsRange !== true && !passesLimit(answer, found.range.plus_minus_mg_L))
   )
     return outcome;
+  if (found.data.dose_mg_L[1] === 0) return outcome;
   const lines = rangeLines(reading, found.data, manner, 'effect');
   const at = outcome.lines.findIndex(({ room }) => room !== 'first' && room !== 'condition');
   const place = at < 0 ? outcome.lines.length : at;

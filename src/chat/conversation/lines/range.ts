@@ -4,6 +4,7 @@ import { concentrationText, massText, molecularText } from '../../replies/quanti
 import type { Line, Room } from '../../replies/reply.ts';
 import type { RangeData } from '../lab/lab-answer.ts';
 import type { Manner } from '../manner.ts';
+import { countOf } from '../to-requests.ts';
 import { additiveVolumeText } from './amount-text.ts';
 import { line } from './line.ts';
 import { vesselText } from './vessel.ts';
@@ -21,6 +22,7 @@ export function rangeLines(reading: Reading, data: RangeData, manner: Manner, ro
       high: text(high),
       unit,
       amount: amountOf(data, manner),
+      count: countOf(reading) === undefined ? 'one' : 'several',
     }),
     line(room, 'range-sure', { molecular: molecularText(data.molecular_sure_mg_L, mark), unit }),
     line('assumed', 'range-rests', {

@@ -6,14 +6,14 @@ import { line } from '../lines/line.ts';
 import type { Remembered } from '../memory.ts';
 import type { Handled } from '../ports.ts';
 import { replying } from '../replying.ts';
-import { resultOf, titrationOf } from '../to-titration.ts';
+import { isTooMuch, resultOf, titrationOf } from '../to-titration.ts';
 
 /** "Keep it": the result of a titration as a reading of its vessel, once however often and by however many it is pressed. */
 export async function keepTitration(found: Remembered, here: Here, view: CellarView): Promise<Handled> {
   const { reading, chat, ref, at } = found;
   const { vessel } = reading.fields;
   const answer = reading.titration && titrationOf(reading.titration);
-  if (vessel === undefined || answer === undefined)
+  if (vessel === undefined || answer === undefined || isTooMuch(answer))
     return replying(here, { lines: [line('first', 'old-button')] });
   const event = `titration ${JSON.stringify([chat, ref])}`;
   const before = await view.entriesOfKeys(event);

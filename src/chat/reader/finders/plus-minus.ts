@@ -28,7 +28,11 @@ function figureBefore(board: Board, i: number): number | undefined {
  * anything else is set aside, and one that cannot be is asked about.
  */
 export function findPlusMinus(board: Board): void {
-  if (board.pieces.some((_, k) => isOwn(board.pieces, k, 'lab-range'))) board.marks.wantsRange = true;
+  for (const [k, { from, to }] of board.pieces.entries()) {
+    if (!isOwn(board.pieces, k, 'lab-range')) continue;
+    board.marks.wantsRange = true;
+    claim(board, from, to);
+  }
   for (let i = 0; i < board.terms.length; i++) {
     const sign = signEnd(board, i);
     if (sign === undefined || !isFree(board, sign + 1)) continue;

@@ -1,5 +1,5 @@
 import type { Board } from '../board.ts';
-import { freshBoard } from '../board.ts';
+import { freshBoard, wordsOf } from '../board.ts';
 import { draftOfBoard } from '../draft-of-board.ts';
 import { findKind } from '../finders/kind.ts';
 import { findVessel } from '../finders/vessel.ts';
@@ -45,6 +45,7 @@ export function readTitration(board: Board): Draft | undefined {
   const labels = labelFigures(own.pieces, rest);
   const left = takeVolumes(rest, labels, said);
   for (const figure of figures) claimFigure(own, figure);
+  refuseSeveral(own);
   // Two volumes that could be either are asked for by what is missing.
   const isAsked = said.sample_mL === undefined || said.titrant_mL === undefined;
   for (const figure of left)
@@ -54,6 +55,19 @@ export function readTitration(board: Board): Draft | undefined {
     own.problems.push({ code: 'conflicting-values', about: `${said.blank_mL} / ${said.titrant_mL}` });
   if (!isPossible(said)) own.problems.push({ code: 'value-out-of-range', about: '' });
   return { ...draftOfBoard(own, 'titration'), titration: said };
+}
+
+/** A sample is of one vessel: of several nobody can tell which. */
+function refuseSeveral(board: Board): void {
+  const [first, second] = board.findings.filter(({ field }) => field === 'vessel' || field === 'vessels');
+  if (first === undefined || (second === undefined && first.field === 'vessel')) return;
+  board.problems.push({
+    code: 'conflicting-values',
+    about: [first, second]
+      .map((one) => (one ? wordsOf(board, one.from, one.to) : ''))
+      .filter(Boolean)
+      .join(' / '),
+  });
 }
 
 /** `AO 20` names no vessel. */
