@@ -22,6 +22,7 @@ import { isStrange, topicOf } from './topic.ts';
 import type { AwaitedField, Reading, ReaderSettings, Understood } from './understood.ts';
 import { readWaiting } from './waiting-answer.ts';
 import { withoutMentions } from './without-mentions.ts';
+import { withAccents } from './with-accents.ts';
 import type { Tag } from './words/words.ts';
 
 /** The longest message that is read, in UTF-16 units; the platform's own limit. */
@@ -54,7 +55,7 @@ export function setBoard(
   said: readonly Term[],
   settings: ReaderSettings,
 ): Board {
-  const { terms, remark } = takeRemark(message, folded, said);
+  const { terms, remark } = takeRemark(message, folded, withAccents(message, folded, said));
   const lexicon = lexiconOf(folded, settings.language);
   return {
     message,

@@ -45,6 +45,7 @@ const isJoin = (board: Board, i: number): boolean => {
       (term.text === '→' && hasTag(board, i - 1, 'label:ph')) ||
       (term.text === '-' && !(term.gap && board.terms[i + 1]?.gap === false))
     );
+  if (isCue(board, i, 'also-at') && hasTag(board, i - 1, 'label:ph')) return true;
   return isCue(board, i, 'is') && labelAt(board, i) === undefined;
 };
 

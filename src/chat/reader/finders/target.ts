@@ -49,6 +49,7 @@ const declines = (board: Board, i: number): boolean =>
 /** `2000 l a pH 3,55`, `à 18 de libre`: a word that says "at" as well as "to"; of a level nobody can tell which. */
 function isAt(board: Board, i: number, { aim, label }: { aim: Aim; label?: Aim['kind'] }): boolean {
   if (!isCue(board, i, 'also-at')) return false;
+  if (hasTag(board, i - 1, 'label:ph')) return true;
   if ((label === 'ph' || aim.kind === 'ph') && !isStranger(board, i - 1)) return true;
   if (isCellarTalk(board)) refuse(board, 'ambiguous-number', i, aim.to);
   return true;
