@@ -402,6 +402,7 @@ must-published =
         [read] Published: { $list } ({ $source }).
        *[memory] Published: { $list } ({ $source }; from memory, not read).
     }
+must-none-published = The figures on file were published for grapes; for { product } there is none.
 must-range =
     { $state ->
         [sound] { must-colour }sound { $range }
@@ -2159,6 +2160,7 @@ range-rests = Rests on pH ± { $ph } and free ± { $free } { $unit }{ $said ->
     [one] {" "}(what you did not say: common practice, no source).
    *[none] {" "}(common practice, no source). Yours: pH 3.58±0.03 free 21±2
 }
+range-limit = At its high end the total may pass the limit.
 range-nothing = A range needs a dose first. Send a reading, like: T4 1450 gal pH 3.58±0.03 free 21
 table-head = Free SO2 ({ $unit }) for molecular { $targets }, { $basis ->
     [oiv] by OIV at 12 % vol and 20 °C (pK { $pK })

@@ -1,5 +1,6 @@
 import type { DoseAnswer } from '../../../core/dose/answer.ts';
 import type { Reading } from '../../reader/understood.ts';
+import { line } from '../lines/line.ts';
 import { rangeLines } from '../lines/range.ts';
 import type { Outcome, Turn } from '../outcome.ts';
 import { rangeOf } from './range-of.ts';
@@ -16,7 +17,9 @@ export function withRange(reading: Reading, outcome: Outcome, { settings, manner
   )
     return outcome;
   if (found.data.dose_mg_L[1] === 0) return outcome;
-  const lines = rangeLines(reading, found.data, manner, 'effect');
+  const all = rangeLines(reading, found.data, manner, 'effect');
+  // Unasked it says only what it is about: `range` tells the rest.
+  const lines = reading.marks.wantsRange === true ? all : [...all.slice(0, 1), line('effect', 'range-limit')];
   const at = outcome.lines.findIndex(({ room }) => room !== 'first' && room !== 'condition');
   const place = at < 0 ? outcome.lines.length : at;
   return {
