@@ -130,7 +130,7 @@ export const es: Words = {
     'cue:past-time': ['esta manana', 'ayer', 'anoche', 'antes', 'ya', 'esta tarde', 'hace una hora', 'la semana pasada', 'hace', 'hace un rato'],
     'cue:put': ['puesto'],
     'cue:bag': ['saco de', 'sacos de', 'bolsa de', 'bolsas de', 'caja de', 'cajas de', 'garrafa de', 'garrafas de', 'sacos', 'bolsas', 'bidon de'],
-    'cue:buy': ['pedir', 'comprar', 'compra', 'pedido', 'comprado', 'encargar', 'factura', 'entregado', 'albaran', 'recibido'],
+    'cue:buy': ['compramos', 'encarga', 'pide', 'pedir', 'comprar', 'compra', 'pedido', 'comprado', 'encargar', 'factura', 'entregado', 'albaran', 'recibido'],
     'cue:share-word': ['menos', 'mas', 'nuevo', 'nueva', 'extra', 'mayor', 'menor', 'perdida', 'descuento', 'mezcla', 'merma', 'arriba', 'abajo', 'raspon'],
     'cue:fullness': ['lleno', 'llena', 'llenos', 'vacio', 'vacia'],
     'cue:bottle-unit': ['botella', 'botellas', 'magnum', 'magnums'],

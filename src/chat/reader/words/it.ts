@@ -132,7 +132,7 @@ export const it: Words = {
     'cue:past-time': ['stamattina', 'ieri', 'ieri sera', 'prima', 'gia', 'oggi pomeriggio', 'un ora fa', 'settimana scorsa', 'fa', 'stamane'],
     'cue:put': [],
     'cue:bag': ['sacco di', 'sacchi di', 'sacchetto di', 'cartone di', 'scatola di', 'tanica di', 'taniche di', 'sacchi', 'sacco', 'fusto di'],
-    'cue:buy': ['comprare', 'comprato', 'ordinare', 'ordinato', 'ordine', 'fattura', 'consegna', 'consegnato', 'acquisto', 'acquistare', 'arrivati'],
+    'cue:buy': ['compra', 'compriamo', 'ordina', 'ordiniamo', 'comprare', 'comprato', 'ordinare', 'ordinato', 'ordine', 'fattura', 'consegna', 'consegnato', 'acquisto', 'acquistare', 'arrivati'],
     'cue:share-word': ['meno', 'piu', 'nuovo', 'nuova', 'extra', 'perdita', 'sconto', 'taglio', 'torchiato', 'scarico', 'raspi'],
     'cue:fullness': ['pieno', 'piena', 'vuoto', 'vuota', 'pieni', 'piene'],
     'cue:bottle-unit': ['bottiglia', 'bottiglie', 'magnum'],

@@ -131,7 +131,7 @@ export const pt: Words = {
     'cue:past-time': ['esta manha', 'hoje de manha', 'ontem', 'ontem a noite', 'antes', 'ja', 'esta tarde', 'ha uma hora', 'semana passada', 'na semana passada', 'ha pouco'],
     'cue:put': ['posto'],
     'cue:bag': ['saco de', 'sacos de', 'caixa de', 'caixas de', 'bidao de', 'bidoes de', 'sacos', 'saco', 'garrafao de', 'galao de'],
-    'cue:buy': ['comprar', 'comprei', 'comprado', 'encomendar', 'encomenda', 'pedido', 'fatura', 'factura', 'entregue', 'entrega', 'recebido', 'compra', 'nota fiscal'],
+    'cue:buy': ['compre', 'encomende', 'comprar', 'comprei', 'comprado', 'encomendar', 'encomenda', 'pedido', 'fatura', 'factura', 'entregue', 'entrega', 'recebido', 'compra', 'nota fiscal'],
     'cue:share-word': ['menos', 'mais', 'novo', 'nova', 'novas', 'extra', 'perda', 'desconto', 'lote', 'prensa', 'quebra', 'engaco'],
     'cue:fullness': ['cheio', 'cheia', 'vazio', 'vazia', 'cheios'],
     'cue:bottle-unit': ['garrafa', 'garrafas', 'magnum', 'magnums'],
