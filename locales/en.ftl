@@ -325,7 +325,11 @@ law-note =
        *[second-value-told] { $value } { $unit } is told elsewhere, from memory
     }
 limit-care = Not legal advice: confirm for your market.
-designation-asked = Sweet wine of a designation with a limit of its own ({ law-of })? I never infer it: say so, like: { $wine } designated 300
+designation-asked =
+    Sweet wine of a designation with a limit of its own ({ law-of })? I never infer it: say so, { $wine ->
+        [none] with: designated 300
+       *[other] like: { $wine } designated 300
+    }
 
 ## The first line: a choice and not a dose
 
@@ -402,7 +406,7 @@ must-published =
         [read] Published: { $list } ({ $source }).
        *[memory] Published: { $list } ({ $source }; from memory, not read).
     }
-must-none-published = The figures on file were published for grapes; for { product } there is none.
+must-none-published = The figures on file were published for grapes; for { fact-product } there is none.
 must-range =
     { $state ->
         [sound] { must-colour }sound { $range }
@@ -2196,10 +2200,13 @@ lab-lacks = { $vessel }: { $what ->
    *[target] no target holds for it as it is; nothing is reckoned.
 }
 learned = This wine bound { $share } % (± { $spread }) of its last { $count } additions.
-learned-offer = This wine bound { $share } % (± { $spread }) of its last { $count } additions. By that: { $amount ->
-    [none] { $dose } { $unit }
-   *[other] { $amount } ({ $dose } { $unit })
-}. Yours to choose.
+learned-offer = This wine bound { $share } % (± { $spread }) of its last { $count } additions. { $limit ->
+    [passes] As much as that takes comes too near the limit.
+   *[within] By that: { $amount ->
+        [none] { $dose } { $unit }
+       *[other] { $amount } ({ $dose } { $unit })
+    }. Yours to choose.
+}
 forecast-below = { $vessel }: free SO2 falls below { $needed } { $unit } { $day ->
     [far] in more than two years
    *[other] about { $day }

@@ -560,6 +560,7 @@ export interface SentenceValues {
   'must-colour': 'style';
   'must-comes-back': 'total' | 'unit';
   'must-malolactic': 'most' | 'unit';
+  'must-none-published': 'product';
   'must-published': 'list' | 'read' | 'source';
   'must-range': 'range' | 'state' | 'style' | 'unit';
   'must-say-state': never;
@@ -744,6 +745,7 @@ export interface SentenceValues {
   'question-which-yield-next': never;
   'question-which-yield-why': never;
   'range-dose': 'amount' | 'count' | 'high' | 'low' | 'unit' | 'vessel';
+  'range-limit': never;
   'range-nothing': never;
   'range-rests': 'free' | 'ph' | 'said' | 'unit';
   'range-sure': 'molecular' | 'unit';

@@ -68,6 +68,7 @@ const SCENES: readonly (readonly [key: string, ...messages: string[]])[] = [
   ['chat-other', 'who left the pump on'],
   ['vessel-unknown', 'T9?'],
   ['ask-zone', 'added 20 g kmbs T4'],
+  ['designation-asked', 'law EU', 'T4 40 hl white RS 60 pH 3.4 free 15 total 240 ML done'],
   ['order-how', 'order T4'],
   ['strike-why', 'added 20 g kmbs T4', 'strike 1'],
   ['history-empty', 'history'],

@@ -109,7 +109,7 @@ export function designationLines(
   return [
     line('assumed', 'designation-asked', {
       region: settings.region,
-      wine: vessel === 'none' ? '…' : vessel,
+      wine: vessel,
     }),
   ];
 }
