@@ -53,7 +53,7 @@ function shownRow(row: RoundRow, words: RoundWords, { mark, nameOf }: RowManner)
     ...(row.isLimited ? [words.limit] : []),
     ...(count > 1 ? [`× ${count}`] : []),
     ...(first === undefined || first.measure.unit === 'tablets' ? [] : [nameOf(first.additive)]),
-    ...(rest === undefined ? [] : [`+ ${amountText(rest, words, mark)} ${nameOf(rest.additive)}`]),
+    ...(rest === undefined ? [] : [restText(rest, words, mark)]),
   ];
   return {
     name: row.name,
@@ -62,6 +62,13 @@ function shownRow(row: RoundRow, words: RoundWords, { mark, nameOf }: RowManner)
     aside: row.is === 'nothing' ? words.nothing : asides.filter((one) => one !== '').join(' · '),
     isToDo: row.is === 'amount',
   };
+}
+
+/** The rest of a dose in tablets, with the strength of its stock: the totals above have its name. */
+function restText(rest: Weighed, words: RoundWords, mark: DecimalMark): string {
+  const { strength_percent } = rest.additive;
+  const strength = strength_percent === undefined ? '' : ` · ${numberText(strength_percent, 2, mark)} %`;
+  return `+ ${amountText(rest, words, mark)}${strength}`;
 }
 
 function amountText({ measure }: Weighed, words: RoundWords, mark: DecimalMark): string {
