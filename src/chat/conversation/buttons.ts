@@ -124,7 +124,7 @@ export function choiceButtons(
 /** A button for each figure that was published for must of fruit in the state that was told; none where none was. */
 export function publishedButtons(ref: string, { marks, fields }: Reading, manner: Manner): Button[] {
   const { fruitState } = marks;
-  if (fields.stage !== 'must' || fruitState === undefined) return [];
+  if (fields.stage !== 'must' || fruitState === undefined || fields.product !== undefined) return [];
   return mustFigures(fruitState, fields.style).map((add_mg_L, place) => ({
     key: `p:${ref}:${place}`,
     mark: String(place + 1),

@@ -534,7 +534,7 @@ export interface SentenceValues {
   'law-of': 'region';
   'law-unknown': 'code';
   learned: 'count' | 'share' | 'spread';
-  'learned-offer': 'amount' | 'count' | 'dose' | 'share' | 'spread' | 'unit';
+  'learned-offer': 'amount' | 'count' | 'dose' | 'limit' | 'share' | 'spread' | 'unit';
   'left-unread': 'count';
   'limit-amount': 'additive' | 'amount' | 'count' | 'left' | 'unit' | 'volume';
   'limit-care': never;

@@ -85,7 +85,9 @@ function askHowMuch(reading: Reading, answer: DoseAnswer, turn: Turn): Outcome {
 function publishedLines(reading: Reading, { manner }: Turn): Line[] {
   return [
     ...mustRangeLines(reading, manner),
-    ...(reading.marks.fruitState === undefined ? [line('effect', 'must-say-state')] : []),
+    ...(reading.marks.fruitState === undefined && reading.fields.product === undefined
+      ? [line('effect', 'must-say-state')]
+      : []),
     ...afterMustLines({}, manner).slice(1),
   ];
 }

@@ -21,9 +21,14 @@ function rangePart(
   });
 }
 
-/** What was published for must of fruit in that state, a line a source; of every state where none is told. */
+/**
+ * What was published for must of grapes in that state, a line a source; of every state where none is told. Of other
+ * fruit and honey none is on file.
+ */
 export function mustRangeLines({ fields, marks }: Reading, manner: Manner): Line[] {
   const { fruitState: state } = marks;
+  if (fields.product !== undefined)
+    return [line('effect', 'must-none-published', { product: fields.product })];
   const ranges =
     state === undefined
       ? MUST_RANGES.filter(({ style }) => [undefined, fields.style ?? style].includes(style))

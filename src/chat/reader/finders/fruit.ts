@@ -76,8 +76,17 @@ export function findYield(board: Board): void {
 
 const STATES: readonly FruitState[] = ['rot', 'damaged', 'sound'];
 
+/** Fruit by weight whose yield is known is must, also where nobody says the word. */
+function assumeMust(board: Board): void {
+  const { fruit_kg, yield_L_per_100_kg } = board.marks;
+  const hasYield = (yield_L_per_100_kg ?? board.settings.yield_L_per_100_kg) !== undefined;
+  if (fruit_kg !== undefined && hasYield && !isFound(board, 'stage'))
+    board.findings.push({ field: 'stage', value: 'must', said: 'bare', from: 0, to: 0 });
+}
+
 /** Finds how sound the fruit of a must is; of several words the worst counts. */
 export function findFruitState(board: Board): void {
+  assumeMust(board);
   const isMust = isFound(board, 'stage') && board.findings.some(({ value }) => value === 'must');
   if (!isMust && !board.marks.fruitByWeight) return;
   for (let i = 0; i < board.terms.length; i++) {
