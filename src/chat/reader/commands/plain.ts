@@ -43,7 +43,6 @@ const FORMS: readonly Form[] = [
   { command: { name: 'watch' }, needs: ['watch'], may: ['of', 'again', 'on'], ofVessel: true, isAct: true },
   { command: { name: 'watch' }, needs: ['remind', 'again'], may: ['of', 'on'], ofVessel: true, isAct: true },
   { command: { name: 'settings' }, needs: ['settings'], may: ['show', 'all'] },
-  { command: { name: 'settings' }, needs: ['law'], may: ['show', 'ask', 'is', 'of'] },
   { command: { name: 'backup' }, needs: ['backup'], may: ['now', 'all'], isAct: true },
   { command: { name: 'forget-me' }, needs: ['forget-me'], isAct: true },
   { command: { name: 'forget' }, needs: ['forget'], ofVessel: true, isAct: true },
