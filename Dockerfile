@@ -19,5 +19,6 @@ USER node
 # Pages that tell whether it works; nobody outside reaches them unless the port is published.
 ENV PORT=8080
 HEALTHCHECK --interval=1m --start-period=20s CMD ["node", "-e", "fetch(`http://127.0.0.1:${process.env.PORT}/healthz`).then((r) => process.exit(r.ok ? 0 : 1), () => process.exit(1))"]
-# Without npm in between: it would not hand on the signal that asks for a clean stop.
-CMD ["node", "src/main.ts"]
+# Without npm in between: it would not hand on the signal that asks for a clean stop. The option is that of `npm start`:
+# a smaller room for what lives shortly takes a quarter less memory.
+CMD ["node", "--max-semi-space-size=8", "src/main.ts"]
