@@ -3,6 +3,7 @@ import { learnedOf } from '../../../core/cellar/learned-of.ts';
 import type { DoseAnswer } from '../../../core/dose/answer.ts';
 import { amountFor } from '../../../core/additives/amount-for.ts';
 import { BOUNDS } from '../../../core/bounds.ts';
+import { KEPT_FOR_METHOD_mg_L } from '../../../core/limits/check-limit.ts';
 import type { Reading } from '../../reader/understood.ts';
 import { numberText } from '../../replies/number-text.ts';
 import { concentrationText, massText } from '../../replies/quantity-text.ts';
@@ -25,19 +26,21 @@ export function withLearned(reading: Reading, outcome: Outcome, { here, settings
   const learned = learnedOf(vessel);
   if (learned === undefined || learned.share > BOUNDS.binding_share.max || answer.capped || answer.choices)
     return outcome;
+  const { mark, unit } = manner;
   const request = toDoseRequest(reading, settings);
   const dose_mg_L = doseFor(answer.add_mg_L ?? 0, { binding_share: learned.share });
+  const passes = passesLimit(answer, dose_mg_L, reading.fields.reserve_mg_L);
   const amount =
-    request.additive === undefined || request.volume_L === undefined
+    passes || request.additive === undefined || request.volume_L === undefined
       ? undefined
       : amountFor((dose_mg_L * request.volume_L) / 1000, request.additive);
-  const { mark, unit } = manner;
   const offered = line('effect', 'learned-offer', {
     share: numberText(100 * learned.share, 0, mark),
     spread: numberText(Math.max(1, 100 * learned.spread), 0, mark),
     count: String(learned.cases),
     dose: concentrationText(dose_mg_L, mark),
     unit,
+    limit: passes ? 'passes' : 'within',
     amount:
       amount?.mass_g !== undefined
         ? massText(amount.mass_g, mark)
@@ -51,4 +54,14 @@ export function withLearned(reading: Reading, outcome: Outcome, { here, settings
     answer: { ...answer, binding: learned },
     lines: [...outcome.lines.slice(0, last), offered, ...outcome.lines.slice(last)],
   };
+}
+
+/** Whether the larger dose would pass the limit that holds, or come nearer to it than any dose does. */
+function passesLimit(
+  { limit, total_after_mg_L, dose_mg_L = 0 }: DoseAnswer,
+  by_mg_L: number,
+  reserve_mg_L = 0,
+): boolean {
+  if (limit === undefined || total_after_mg_L === undefined) return false;
+  return total_after_mg_L - dose_mg_L + by_mg_L > limit.limit_mg_L - KEPT_FOR_METHOD_mg_L - reserve_mg_L;
 }
