@@ -636,7 +636,7 @@ ask-tablet_salt_g = { at }how many grams is one tablet? It stands on the packet;
 ask-tablet_SO2_g = { at }how many grams of SO2 does one effervescent tablet give? It stands on the packet.
 ask-mass_g = { at }how many grams?
 ask-mass-spoon = { at }how many grams? A level teaspoon of powder is roughly 5 to 6 g, and that is too rough to dose by: use a balance.
-ask-fruit = { at }what volume of must, or what yield? With its unit, like: 65 L/100 kg, 160 gal/ton, 1300 L
+ask-fruit = { at }what volume of must, or what yield? Each with its unit, like: 65 L/100 kg, or: 160 gal/ton, or: 1300 L
 option = { $mark }) { $list }
 target-of =
     { $vessel ->

@@ -40,6 +40,7 @@ const SCENES: readonly (readonly [key: string, ...messages: string[]])[] = [
   ['no-dose-all-the-same', 'T1-T3 40 hl each in ML free 5'],
   ['figure-alone', 'T5 40 hl must', '40'],
   ['figure-alone', 'T4 1450 gal in ML free 5', 'add 30 ppm'],
+  ['ask-fruit', '2 t grapes add 40'],
   ['ask-solution-volume', 'holding solution'],
   ['ask-solution-volume', 'rinse T4'],
   ['solution-from-powder', 'make 2 L of 5% so2'],
