@@ -68,7 +68,7 @@ test('a round gives each vessel what it would get alone: 200 rounds', async () =
     }),
     { numRuns: 200 },
   );
-});
+}, 60_000);
 
 test('what a round takes in all is what its lines show: 200 rounds of one powder', async () => {
   const plain = fc.record({
