@@ -2265,7 +2265,10 @@ blend-candidate = { $other }: { $least }–{ $most } %{ $volume ->
        *[yes] {""}
     }
 }
-blend-nobody = None of { $count } other vessels with a reading brings { $vessel } within its bounds.
+blend-nobody = { $count ->
+    [0] No other vessel of that colour is finished and has free SO2 on file, so there is none to blend { $vessel } with.
+   *[other] None of { $count } other vessels with a reading brings { $vessel } within its bounds.
+}
 blend-fails = { $vessel } with { $other }: no share does: { $fails ->
     [total] the total stays over the limit.
     [free] free SO2 stays over the limit.
