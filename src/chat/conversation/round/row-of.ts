@@ -3,7 +3,6 @@ import type { RoundRow } from '../../attachments/round/round-sheet.ts';
 import { saidNothingToWeigh } from '../lines/nothing-needed.ts';
 import { shownDose } from '../lines/shown-dose.ts';
 import type { SaidInRound } from '../lines/round-foot.ts';
-import { toBeWeighed } from '../to-be-weighed.ts';
 import { additiveOf } from '../to-requests.ts';
 import { vesselsIn } from '../vessels-named.ts';
 import { weighedOf } from './weighed-of.ts';
@@ -32,17 +31,19 @@ export function rowOf({ reading, outcome, ref, name }: SaidInRound): RoundRow | 
   const additive = additiveOf(reading);
   if (answer && saidNothingToWeigh(answer)) return { ...row, is: 'nothing', weighed: [] };
   if (answer === undefined || additive === undefined || !isSaid) return { ...row, is: 'open', weighed: [] };
+  const weighed = weighedOf(additive, answer);
   const shown = shownDose(answer);
   const { dose_mg_L, free_after_mg_L, isLimited } = shown;
   const { measure_gives_mg_L: gives_mg_L } = shown.per_vessel ?? shown;
   return {
     ...row,
     is: 'amount',
-    weighed: weighedOf(additive, answer),
+    weighed,
     ...(dose_mg_L !== undefined && { dose_mg_L }),
     ...(free_after_mg_L !== undefined && { free_after_mg_L }),
     ...(isLimited && { isLimited }),
     ...(gives_mg_L !== undefined && { gives_mg_L }),
-    ...(vessels.length > 0 && toBeWeighed(reading, answer) !== undefined && { mayBeNoted: true as const }),
+    // Tablets and the rest of their dose as a stock are no one amount.
+    ...(vessels.length > 0 && weighed.length === 1 && { mayBeNoted: true as const }),
   };
 }
