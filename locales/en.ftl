@@ -1606,6 +1606,7 @@ open-line = { $entry } · { $vessel } { $list } · { $who }, { $when }
 language-changed = You wrote in English: I answer in English from now on.
 language-set = I answer in English.
 button-stay-language = Stay in English
+language-not-yet = I read that language, but do not answer in it yet.
 settings-head = Settings of this cellar, and how to change them:
 setting-set = Set. { $list }
 setting-units =
@@ -2230,7 +2231,10 @@ forecast-steady = { $vessel }: by its readings free SO2 does not fall; { $from -
 forecast-by-readings = By { $count } readings since the last addition: { $lost } % lost in 30 days.
 forecast-by-rates = { $container ->
     [bottle] By a study of bottles, not by this wine: after 3 years 45 % left at 14 °C, 20 % at 15–26 °C.
-   *[other] By what barrels lose, not by this wine: 3–10 mg/L a month (common practice, no source). { $fewest } readings tell its own; there are { $count }.
+   *[other] By what barrels lose, not by this wine: 3–10 mg/L a month (common practice, no source). { $fewest } readings tell its own; there { $number ->
+        [one] is { $count }
+       *[many] are { $count }
+    }.
 }
 forecast-measure = { $from ->
     [now] Measure now.
@@ -2241,14 +2245,14 @@ forecast-need = It needs { $needed }: pH { $ph } of { $day }, { $molecular } mol
 forecast-none = { $vessel }: { $why ->
     [unmeasured] no free SO2 measured since its last addition. Measure it, then ask again.
     [below-already] free SO2 is at or below the { $needed } { $unit } that its pH asks for. Send the reading for a dose.
-   *[no-rate] no forecast yet. No rate of loss in tanks is on file, and its own takes { $fewest } readings since the last addition; there { $count ->
-        [1] is 1
-       *[other] are { $count }
+   *[no-rate] no forecast yet. No rate of loss in tanks is on file, and its own takes { $fewest } readings since the last addition; there { $number ->
+        [one] is { $count }
+       *[many] are { $count }
     }.
 }
 forecast-unlanded = { $vessel }: the last addition has not landed yet. Measure free SO2 first.
-blend-share = { $vessel } with { $other }: { $least ->
-    [0] as it is { $vessel } keeps to the bounds; up to { $most } % { $other } may come in.
+blend-share = { $vessel } with { $other }: { $starts ->
+    [as-it-is] as it is { $vessel } keeps to the bounds; up to { $most } % { $other } may come in.
    *[other] from { $least } to { $most } % of { $other } in the blend.
 }{ $volume ->
     [none] {""}
@@ -2265,8 +2269,8 @@ blend-candidate = { $other }: { $least }–{ $most } %{ $volume ->
        *[yes] {""}
     }
 }
-blend-nobody = { $count ->
-    [0] No other vessel of that colour is finished and has free SO2 on file, so there is none to blend { $vessel } with.
+blend-nobody = { $any ->
+    [none] No other vessel of that colour is finished and has free SO2 on file, so there is none to blend { $vessel } with.
    *[other] None of { $count } other vessels with a reading brings { $vessel } within its bounds.
 }
 blend-fails = { $vessel } with { $other }: no share does: { $fails ->

@@ -68,8 +68,8 @@ export interface SentenceValues {
   'blend-fails': 'fails' | 'other' | 'vessel';
   'blend-figure': 'day' | 'free' | 'vessel';
   'blend-figures': 'list';
-  'blend-nobody': 'count' | 'vessel';
-  'blend-share': 'enough' | 'held' | 'least' | 'most' | 'other' | 'vessel' | 'volume';
+  'blend-nobody': 'any' | 'count' | 'vessel';
+  'blend-share': 'enough' | 'held' | 'least' | 'most' | 'other' | 'starts' | 'vessel' | 'volume';
   'blend-whole': 'free' | 'total' | 'volume';
   'bottling-each': 'each';
   'bottling-measured': 'amount' | 'count' | 'each' | 'oxygen' | 'unit';
@@ -364,11 +364,11 @@ export interface SentenceValues {
   folded: never;
   'for-each': 'count';
   'forecast-below': 'by' | 'day' | 'from' | 'needed' | 'to' | 'unit' | 'vessel';
-  'forecast-by-rates': 'container' | 'count' | 'fewest';
+  'forecast-by-rates': 'container' | 'count' | 'fewest' | 'number';
   'forecast-by-readings': 'count' | 'lost';
   'forecast-measure': 'from';
   'forecast-need': 'day' | 'molecular' | 'needed' | 'ph';
-  'forecast-none': 'count' | 'fewest' | 'needed' | 'unit' | 'vessel' | 'why';
+  'forecast-none': 'count' | 'fewest' | 'needed' | 'number' | 'unit' | 'vessel' | 'why';
   'forecast-steady': 'from' | 'needed' | 'unit' | 'vessel';
   'forecast-unlanded': 'vessel';
   'forgotten-person': 'number';
@@ -526,6 +526,7 @@ export interface SentenceValues {
   'landed-fell': 'added' | 'after' | 'before' | 'unit' | 'vessel';
   'landed-too-high': 'added' | 'rise' | 'unit' | 'vessel';
   'language-changed': never;
+  'language-not-yet': never;
   'language-set': never;
   'last-keeper': 'name';
   'law-assumed': 'list';

@@ -51,7 +51,11 @@ async function tellCandidates(wine: Vessel, here: Here, view: CellarView): Promi
     .toSorted((a, b) => (a.found.least ?? 1) - (b.found.least ?? 1));
   const lines: Line[] = [
     fitting.length === 0
-      ? line('first', 'blend-nobody', { vessel: vesselName(wine.vessel), count: String(tried.length) })
+      ? line('first', 'blend-nobody', {
+          vessel: vesselName(wine.vessel),
+          count: String(tried.length),
+          any: tried.length === 0 ? 'none' : 'some',
+        })
       : line('first', 'blend-candidates', { vessel: vesselName(wine.vessel) }),
     ...fitting.slice(0, CANDIDATES).map((one) => candidateLine(one, here)),
     ...(fitting.length === 0 ? [] : [line('effect', 'blend-care')]),

@@ -60,6 +60,7 @@ function foundLines(found: Forecast, vessel: Vessel, needed: Needed, here: Here)
     needed: concentrationText(needed.needed_mg_L, mark),
     unit: here.memory.concentrationUnit === 'ppm' ? 'ppm' : 'mg/L',
     count: String(freePoints(vessel).length),
+    number: freePoints(vessel).length === 1 ? 'one' : 'many',
     fewest: String(POINTS_FEWEST),
     container: containerOf(vessel),
   };

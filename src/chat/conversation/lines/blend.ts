@@ -49,7 +49,12 @@ function shareValues({ wine, other, found }: Tried, here: Here): Record<string, 
   };
 }
 
-const shareLine = (tried: Tried, here: Here): Line => line('first', 'blend-share', shareValues(tried, here));
+/** With none of the other wine it keeps to the bounds, or from a share on. */
+const shareLine = (tried: Tried, here: Here): Line =>
+  line('first', 'blend-share', {
+    ...shareValues(tried, here),
+    starts: tried.found.least === 0 ? 'as-it-is' : 'from',
+  });
 
 function failLine({ wine, other, found }: Tried, _here: Here): Line {
   return line('first', 'blend-fails', {
