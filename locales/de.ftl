@@ -6,3 +6,7 @@ emergency-call = Den Notruf wählen.
 emergency-swallowed = Verschluckt: Mund ausspülen, nicht zum Erbrechen bringen, Giftnotruf oder Notruf wählen.
 emergency-eyes = Augen: 15 Minuten mit Wasser spülen, Kontaktlinsen heraus.
 emergency-skin = Haut: mit viel Wasser spülen, nasse Kleidung ausziehen.
+
+language-changed = Du hast Deutsch geschrieben: ab jetzt antworte ich auf Deutsch.
+language-set = Ich antworte auf Deutsch.
+button-stay-language = Bei Deutsch bleiben

@@ -6,3 +6,7 @@ emergency-call = Liguem para a emergência.
 emergency-swallowed = Engolido: enxaguar a boca, não provocar o vómito, ligar para o centro antivenenos ou para a emergência.
 emergency-eyes = Olhos: lavar com água durante 15 minutos, tirar as lentes de contacto.
 emergency-skin = Pele: lavar com muita água, tirar a roupa molhada.
+
+language-changed = Escreveste em português: a partir de agora respondo em português.
+language-set = Respondo em português.
+button-stay-language = Continuar em português

@@ -55,6 +55,7 @@ export function stay(language: Language, here: Here): Handled {
 /** The chat is told in a language from now on; in a private chat that is the person's too. */
 export async function setLanguage(language: Language, here: Here, view: CellarView): Promise<Handled> {
   const { message } = here;
+  if (!SPOKEN.includes(language)) return replying(here, { lines: [line('first', 'language-not-yet')] });
   const next = { ...here, settings: { ...here.settings, language } };
   const handled = replying(next, { lines: [line('first', 'language-set')] });
   const daily = await view.kept(dailyKey(message.chat));
