@@ -1,3 +1,4 @@
+import { learnedOf } from '../../../../core/cellar/learned-of.ts';
 import { nextCheck } from '../../../../core/cellar/next-check.ts';
 import type { WineTraits } from '../../../../core/cellar/entry.ts';
 import type { Known, KnownTraits, Vessel } from '../../../../core/cellar/vessel.ts';
@@ -10,6 +11,7 @@ import { vesselName } from '../../../replies/vessel-name.ts';
 import { volumeText } from '../../../replies/volume-text.ts';
 import { checkSettingsOf } from '../../check-settings-of.ts';
 import type { Here } from '../../here.ts';
+import { learnedLine } from '../../lines/learned.ts';
 import { lawFacts } from '../../lines/law-facts.ts';
 import { line, listLine, part } from '../../lines/line.ts';
 import { notedAmount } from '../../lines/noted-amount.ts';
@@ -114,8 +116,12 @@ function additionLine(one: Vessel['additions'][number], vessel: Vessel, here: He
   return { ...line('first', 'vessel-addition', values), list: amount ? [amount] : [part('amount-unknown')] };
 }
 
-/** The share that bound so far: of each addition that landed, from the least to the most. */
-function boundLines({ landings }: Vessel, here: Here): Line[] {
+/** The share that bound so far: as it was learned, else of each addition that landed, from the least to the most. */
+function boundLines(vessel: Vessel, here: Here): Line[] {
+  const { landings } = vessel;
+  const learned = learnedOf(vessel);
+  if (learned !== undefined)
+    return [{ ...learnedLine(learned, here.memory.decimalMark ?? '.'), room: 'first' }];
   const shares = landings.map(({ bound_share }) => bound_share).filter((one) => one >= 0 && one <= 1);
   if (shares.length === 0) return [];
   const mark = here.memory.decimalMark ?? '.';
