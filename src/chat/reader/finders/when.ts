@@ -69,7 +69,9 @@ function isOfVessel({ pieces, terms }: Board, k: number): boolean {
 function partAt(board: Board, k: number): Part | undefined {
   const { pieces } = board;
   if (!mayOpen(pieces, k) || isOfVessel(board, k)) return undefined;
-  const ago = pieces.some(({ ids }) => ids.includes('ago') || ids.includes('ago-before')) ? agoAt(pieces, k) : undefined;
+  const ago = pieces.some(({ ids }) => ids.includes('ago') || ids.includes('ago-before'))
+    ? agoAt(pieces, k)
+    : undefined;
   if (ago) return { ...ago, from: k, isPast: true, isClaimed: true };
   const found = dayAt(pieces, k);
   if (found) {
