@@ -29,7 +29,7 @@ const ROWS: readonly Row[] = [
   // The reds and the rosé.
   [88, '10:20', TOMAS, 'T3 now 4900 L red must pH 3.52 free 0'],
   [88, '10:40', TOMAS, 'added 250 g kmbs T3 lot 4471'],
-  [88, '10:45', INES, 'T3 = Tinta'],
+  [88, '10:45', INES, 'T3 = Brasa'],
   [87, '11:15', NORA, 'T4 now 3150 L rosé must pH 3.31 free 0'],
   [87, '11:30', NORA, 'added 160 g kmbs T4 lot 4471'],
   [87, '11:35', INES, 'T4 = Rosada'],

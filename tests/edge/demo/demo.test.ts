@@ -104,14 +104,14 @@ describe.each(STARTS)('the demo in %s at %s', (zone, moment) => {
     expect(lots).toEqual({
       'tank 1': 'Blanca',
       'tank 2': undefined,
-      'tank 3': 'Tinta',
+      'tank 3': 'Brasa',
       'tank 4': 'Rosada',
       'tank 5': 'Tardia',
       'tank 6': 'Marea',
-      B1: 'Tinta',
-      B2: 'Tinta',
-      B3: 'Tinta',
-      B4: 'Tinta',
+      B1: 'Brasa',
+      B2: 'Brasa',
+      B3: 'Brasa',
+      B4: 'Brasa',
     });
   });
 
