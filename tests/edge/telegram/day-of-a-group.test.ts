@@ -87,7 +87,7 @@ test('a sheet that is sent to the chat is shown, then taken', async () => {
   // A second of ours is a quarter of an hour on the clock here, and what is shown can be taken for one hour.
   const rosa = new Person(api, 7001, { begun_s: Math.round(hastyClock.now() / 1000) + 3000 });
   serve(wholeBot());
-  const bytes = new TextEncoder().encode('vessel,volume,pH\nT1,20 hl,3.4\nT2,30 hl,3.5\nnothing here\n');
+  const bytes = new TextEncoder().encode('vessel,volume,colour\nT1,20 hl,white\nT2,30 hl,red\nnothing here\n');
   api.files.set('sheet', { path: 'documents/file_1.csv', bytes });
   const document = {
     file_id: 'sheet',
@@ -103,6 +103,13 @@ test('a sheet that is sent to the chat is shown, then taken', async () => {
   expect(await rosa.reads(2)).toContain('Taken');
   rosa.sends('vessels');
   expect(await rosa.reads(3)).toContain('T2');
+
+  // A pH is a reading, and a list of vessels would drop it: the file is a round, and its vessels alone are one choice.
+  const measured = 'vessel,volume,pH\nT1,20 hl,3.4\nT2,30 hl,3.5\nnothing here\n';
+  api.files.set('round', { path: 'documents/file_2.csv', bytes: new TextEncoder().encode(measured) });
+  rosa.sends({ document: { ...document, file_id: 'round' } });
+  expect(await rosa.reads(4)).toContain('A round of 2 lines.\nNot understood, and left out: line 4');
+  expect(rosa.got[3]?.buttons).toHaveLength(3);
 });
 
 test('who begins with a link of an invitation is in, and a stranger is not', async () => {
