@@ -112,7 +112,14 @@ function needs(known: Fields): string[] {
 /** Assumptions that a reply with an amount does not state. */
 function unsaid(reading: Reading, answer: Answer | null, replies: readonly Reply[]): string[] {
   if (answer === null || !hasAmount(answer)) return [];
-  const text = replies.map((reply) => say(reply).text).join('\n');
+  // Where the limit leaves no room the reply shows no amount.
+  if ('capped' in answer && answer.capped?.dose_mg_L === 0) return [];
+  const inEnglish = (reply: Reply): Reply => ({
+    ...reply,
+    language: 'en',
+    lines: reply.lines.map((one) => ({ ...one, language: 'en' })),
+  });
+  const text = replies.map((reply) => say(inEnglish(reply)).text).join('\n');
   const { assumed } = reading;
   const signs: readonly (readonly [string, boolean, RegExp])[] = [
     ['additive', assumed.additive !== undefined, /metabisulfite/i],
@@ -129,7 +136,7 @@ function unsaid(reading: Reading, answer: Answer | null, replies: readonly Reply
 function notFinite(value: unknown, path: string): string[] {
   if (typeof value === 'number') {
     if (!Number.isFinite(value)) return [`${path} is ${value}`];
-    const signed = /steps|rounding_mg_L|values/.test(path);
+    const signed = /steps|rounding_mg_L|values|temperature_C/.test(path);
     return value < 0 && !signed ? [`${path} is negative: ${value}`] : [];
   }
   if (typeof value !== 'object' || value === null) return [];

@@ -90,6 +90,9 @@ const SCENES: readonly (readonly [key: string, ...messages: string[]])[] = [
   ['stock-lacks', 'received 25 kg sulfite powder'],
   ['added-it-none', 'added it'],
   ['picture-none', 'picture'],
+  ['range-nothing', 'range'],
+  ['lab-lacks', 'T4 free 20', 'molecular T4'],
+  ['lab-lacks', 'T4 pH 3.5', 'T5 pH 3.4 free 20', 'blend T4 T5'],
   ['volume-differs', 'T4 40 hl pH 3.5 free 20', 'T4 now 500 L free 25'],
 ];
 

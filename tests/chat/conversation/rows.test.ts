@@ -66,9 +66,9 @@ test.each(Object.values(ADDITIVES).map(({ id }) => id))(
   },
 );
 
-test('help explains itself with three examples in twelve rows', async () => {
+test('help explains itself with three examples and its topics in sixteen rows', async () => {
   const help = textOf(await startTalk().write('?'));
-  expect(rowsOf(help, PHONE_COLUMNS)).toBeLessThanOrEqual(12);
+  expect(rowsOf(help, PHONE_COLUMNS)).toBeLessThanOrEqual(16);
   const examples = help
     .split('\n')
     .flatMap((_, at, all) => (all[at + 1]?.startsWith('→') ? [all[at] ?? ''] : []));

@@ -46,20 +46,23 @@ export function limitValues(reading: Reading, answer: Capped, manner: Manner): L
   };
 }
 
+/** What the smaller dose gives, and the rule that it keeps, as values of a sentence. */
+function cappedValues(reading: Reading, answer: Capped, manner: Manner): Line['values'] {
+  const limit = limitValues(reading, answer, manner);
+  const { total_mg_L, free_mg_L = 0 } = reading.fields;
+  const before_mg_L = limit['of'] === 'free' ? free_mg_L : (total_mg_L ?? free_mg_L);
+  return { ...limit, after: concentrationText(before_mg_L + answer.capped.dose_mg_L, manner.mark) };
+}
+
 /** Under its line in a round: what the smaller dose gives, and the rule that it keeps. */
 export function cappedInRound(reading: Reading, answer: Capped, manner: Manner): Line {
-  const { values } = cappedFirst(line('first', 'dose-capped'), reading, answer, manner);
-  return line('first', 'round-capped', values);
+  return line('first', 'round-capped', cappedValues(reading, answer, manner));
 }
 
 /** The first line of a smaller dose: the amount, what it gives, and the rule that it keeps. */
 export function cappedFirst(first: Line, reading: Reading, answer: Capped, manner: Manner): Line {
   const { key, values } = first;
-  const limit = limitValues(reading, answer, manner);
-  const { total_mg_L, free_mg_L = 0 } = reading.fields;
-  const before_mg_L = limit['of'] === 'free' ? free_mg_L : (total_mg_L ?? free_mg_L);
-  const after = concentrationText(before_mg_L + answer.capped.dose_mg_L, manner.mark);
-  return { ...line('first', 'dose-capped', { ...limit, after }), list: [{ key, values }] };
+  return { ...line('first', 'dose-capped', cappedValues(reading, answer, manner)), list: [{ key, values }] };
 }
 
 /** How much is kept below the limit, and why. */

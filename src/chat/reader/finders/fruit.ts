@@ -35,6 +35,8 @@ function weightAt(board: Board, i: number): { weight_kg: number; to: number } | 
   const at = isFree(board, i) ? i + 1 : i;
   const unit = unitAt(board, at, ['kg', 'ton', 'quintal', 'lb']);
   const word = termAt(board, at).text;
+  // `950 L / T8` names a tank.
+  if (board.taken[at] === true || (word === 't' && isFree(board, at + 1))) return undefined;
   if (unit?.id === 'kg') return { weight_kg: count, to: unit.to };
   if (unit?.id === 'quintal') return { weight_kg: count * 100, to: unit.to };
   if (unit?.id === 'ton') return { weight_kg: count * tonIn_kg(board, word), to: unit.to };
