@@ -87,7 +87,9 @@ test('a sheet that is sent to the chat is shown, then taken', async () => {
   // A second of ours is a quarter of an hour on the clock here, and what is shown can be taken for one hour.
   const rosa = new Person(api, 7001, { begun_s: Math.round(hastyClock.now() / 1000) + 3000 });
   serve(wholeBot());
-  const bytes = new TextEncoder().encode('vessel,volume,colour\nT1,20 hl,white\nT2,30 hl,red\nnothing here\n');
+  const bytes = new TextEncoder().encode(
+    'vessel,volume,colour\nT1,20 hl,white\nT2,30 hl,red\nnothing here\n',
+  );
   api.files.set('sheet', { path: 'documents/file_1.csv', bytes });
   const document = {
     file_id: 'sheet',
