@@ -20,6 +20,7 @@ for (const file of [
   'en-must.jsonl',
   'en-bottling.jsonl',
   'en-law.jsonl',
+  'en-vintage.jsonl',
   'refused.en.jsonl',
   'emergency.jsonl',
   'en-commands.jsonl',

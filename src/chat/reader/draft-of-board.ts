@@ -3,12 +3,13 @@ import type { Board, Finding } from './board.ts';
 import { findingOf, holdsCue, isCue, placeOf } from './board.ts';
 import { USUAL_BARREL_L } from './finders/barrels.ts';
 import { mostCautious } from './finders/stage.ts';
+import { isOfEach, shareCounted } from './share-counted.ts';
 import type { Draft, FieldName, Fields, Intent, Place } from './understood.ts';
 
 /** Several vessels with one volume: of each, in all, or asked. */
 function shareVolume(board: Board, fields: Record<string, unknown>): void {
   const vessels = findingOf(board, 'vessels')?.value;
-  if (vessels === undefined) return;
+  if (vessels === undefined) return shareCounted(board, fields);
   const place = findingOf(board, 'volume_L');
   const volume = place?.value;
   const isWorded = vessels[0]?.startsWith('barrel ') === true;
@@ -22,7 +23,7 @@ function shareVolume(board: Board, fields: Record<string, unknown>): void {
     !board.marks.statedTotal &&
     (board.marks.statedEach ||
       holdsCue(board, 'each') ||
-      (isBarrels && volume <= 700 && !holdsCue(board, 'altogether')))
+      (isBarrels && isOfEach(volume, vessels.length) && !holdsCue(board, 'altogether')))
   ) {
     fields['volume_L'] = volume * vessels.length;
     if (!board.marks.statedEach && !holdsCue(board, 'each'))

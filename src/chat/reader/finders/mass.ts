@@ -12,8 +12,20 @@ export const gramsOf = (unit: UnitId): number =>
 /** `1.250 kg`, `1,250 kg`: a kilogram and a quarter, or more than a ton? Asked in every language. */
 export const isThreeDigits = (text: string): boolean => /^[1-9]\d{0,2}[.,]\d{3}$/.test(text);
 
-const skipsTo = (board: Board, i: number): number =>
-  isCue(board, i, 'of') || isCue(board, i, 'article') ? i + 1 : i;
+/** Where the thing stands that a weight is of: `2 t of the white grapes`. */
+function skipsTo(board: Board, i: number): number {
+  let at = i;
+  while (
+    at < i + 3 &&
+    (isCue(board, at, 'of') ||
+      isCue(board, at, 'article') ||
+      STYLES.some((style) => hasTag(board, at, style)))
+  )
+    at++;
+  return at;
+}
+
+const STYLES = ['style:red', 'style:white', 'style:rosé'] as const;
 
 /** A `G` with "of must", "of wine", "of juice" may mean gallons; grams of wine nobody weighs. */
 export const mayBeGallons = (board: Board, i: number): boolean => {
