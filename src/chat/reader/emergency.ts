@@ -104,13 +104,19 @@ const isName = (word: string): boolean =>
 /** A comma or a full stop: what stands before it is no subject of what follows. */
 const isStop = (word: string): boolean => /^[,.;!?\n]$/.test(word);
 
+/** A group of words of the message, without those that are only a manner of speaking. */
+const literal = (hits: Hits, id: DangerId): readonly Hit[] =>
+  all(hits, id).filter(
+    ({ from, to }) => !all(hits, 'idiom').some((idiom) => idiom.from <= from && idiom.to >= to),
+  );
+
 /** A gas and a leak within four words; free and total SO2 are no gas. */
 function isGasLeak(hits: Hits, words: readonly string[]): boolean {
   const gases = all(hits, 'gas').filter(
     ({ from }) =>
       !['free', 'total', 'libre', 'livre', 'libera', 'mol', 'molecular'].includes(words[from - 1] ?? ''),
   );
-  return gases.some((gas) => all(hits, 'leak').some((leak) => Math.abs(leak.from - gas.from) <= 8));
+  return gases.some((gas) => literal(hits, 'leak').some((leak) => Math.abs(leak.from - gas.from) <= 8));
 }
 
 /** `he dropped a hose, it fell into the tank`: a thing stands between the person and the fall. */
@@ -121,12 +127,6 @@ const isDropped = (hits: Hits): boolean =>
         thing.to < fall.from &&
         all(hits, 'person').every((person) => person.to < thing.from || person.from > fall.to),
     ),
-  );
-
-/** A group of words of the message, without those that are only a manner of speaking. */
-const literal = (hits: Hits, id: DangerId): readonly Hit[] =>
-  all(hits, id).filter(
-    ({ from, to }) => !all(hits, 'idiom').some((idiom) => idiom.from <= from && idiom.to >= to),
   );
 
 const isGas = (hits: Hits): boolean => has(hits, 'gas') && has(hits, 'smell') && has(hits, 'place');

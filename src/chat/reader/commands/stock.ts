@@ -35,9 +35,13 @@ const ALLOWED: readonly OwnWordId[] = ['spoilt', 'filler', 'courtesy', 'of', 'so
 /** What may be found: a pH, a volume of wine, a vessel beside it, and it tells of wine. */
 const OF_STOCK = new Set(['additive', 'strength_percent', 'tablet_SO2_g', 'tablet_salt_g', 'tablets', 'mass_g', 'additive_volume_mL']); // prettier-ignore
 
+/** `25 kg de meta`: in many languages one word says from and of; behind it is a figure, or what came in. */
+const isOfWhat = ({ terms }: Board, i: number): boolean =>
+  terms[i]?.kind === 'number' || terms[i]?.tags.some((tag) => tag.startsWith('additive:')) === true;
+
 /** Whom it came from; a vessel is no supplier. */
 function supplierIn(board: Board): Stretch | undefined {
-  const opener = board.pieces.find(({ ids }) => ids.includes('supplier'));
+  const opener = board.pieces.find(({ ids, to }) => ids.includes('supplier') && !isOfWhat(board, to + 1));
   return opener && stretchBehind(board, opener);
 }
 
@@ -46,7 +50,8 @@ function purposeIn(board: Board): Stretch | undefined {
   const { pieces } = board;
   const opener = pieces.find((piece, k) => {
     const next = pieces[k + 1]?.ids.includes('article') ? pieces[k + 2] : pieces[k + 1];
-    return (piece.text === 'for' || piece.text === 'to') && next?.ids.includes('for-equipment') === true;
+    const leads = piece.ids.includes('for') || piece.ids.includes('to');
+    return leads && next?.ids.includes('for-equipment') === true;
   });
   return opener && stretchBehind(board, opener);
 }

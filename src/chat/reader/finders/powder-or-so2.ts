@@ -1,5 +1,5 @@
 import type { Board } from '../board.ts';
-import { holdsCue, isCue, isFree, isMark, refuse } from '../board.ts';
+import { claim, holdsCue, isCue, isFree, isMark, refuse } from '../board.ts';
 import { concentrationAt } from '../units.ts';
 
 const isAdditive = (board: Board, i: number): boolean =>
@@ -42,8 +42,9 @@ const isLabelled = (board: Board, i: number): boolean => {
 export function findPowderOrSO2(board: Board): void {
   for (let i = 0; i < board.terms.length; i++) {
     const unit = isFree(board, i) ? concentrationAt(board, i + 1) : undefined;
-    if (!unit || isLabelled(board, i) || board.terms[unit.to + 1]?.tags.includes('additive:none') === true)
-      continue;
+    if (!unit || isLabelled(board, i)) continue;
+    // `20 ppm copper` is a figure of something else; `20 g/hl bentonite` is a dose of it, and never a free SO2 of 200.
+    if (unit.id !== 'g/hL' && board.terms[unit.to + 1]?.tags.includes('additive:none') === true) continue;
     const after = isCue(board, unit.to + 1, 'of') ? unit.to + 2 : unit.to + 1;
     const before = isMark(board, i - 1, ':') ? i - 2 : i - 1;
     const beside =
@@ -57,7 +58,11 @@ export function findPowderOrSO2(board: Board): void {
           !holdsCue(board, 'add') &&
           !holdsCue(board, 'past')));
     const perLitre = unit.id === 'g/L' && (isAdditive(board, after) || isAdditive(board, before));
-    if (beside || perHectolitre || perLitre)
+    const other = [after, before].find((k) => board.terms[k]?.tags.includes('additive:none') === true);
+    if (perHectolitre && other !== undefined && !beside) {
+      claim(board, i, unit.to);
+      refuse(board, 'unknown-additive', other, other);
+    } else if (beside || perHectolitre || perLitre)
       refuse(
         board,
         'ambiguous-number',

@@ -46,11 +46,29 @@ const declines = (board: Board, i: number): boolean =>
   isCue(board, i - 1, 'not') ||
   (isCue(board, i - 2, 'not') && (isCue(board, i - 1, 'to') || isCue(board, i - 1, 'verb')));
 
+/** `subir el depósito 14 a 34`: a verb of raising before it, with nothing but the vessel or a label between. */
+function isRaised(board: Board, i: number): boolean {
+  let k = i - 1;
+  while (
+    k >= 0 &&
+    !isCue(board, k, 'raise') &&
+    (board.taken[k] === true ||
+      isCue(board, k, 'article') ||
+      hasTag(board, k, 'label:free') ||
+      hasTag(board, k, 'label:so2') ||
+      hasTag(board, k, 'vessel:tank') ||
+      (isCue(board, k, 'of') && k > 0))
+  )
+    k--;
+  return isCue(board, k, 'raise') && !isCue(board, k - 1, 'not');
+}
+
 /** `2000 l a pH 3,55`, `à 18 de libre`: a word that says "at" as well as "to"; of a level nobody can tell which. */
 function isAt(board: Board, i: number, { aim, label }: { aim: Aim; label?: Aim['kind'] }): boolean {
   if (!isCue(board, i, 'also-at')) return false;
   if (hasTag(board, i - 1, 'label:ph')) return true;
   if ((label === 'ph' || aim.kind === 'ph') && !isStranger(board, i - 1)) return true;
+  if (isRaised(board, i)) return false;
   if (isCellarTalk(board)) refuse(board, 'ambiguous-number', i, aim.to);
   return true;
 }

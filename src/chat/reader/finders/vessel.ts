@@ -52,7 +52,9 @@ function worded(board: Board, i: number): Named | undefined {
     isMark(board, k, ':') ||
     isMark(board, k, '.') ||
     isMark(board, k, "'") ||
-    isCue(board, k, 'number-sign')
+    isCue(board, k, 'number-sign') ||
+    // `nº 7`, `n° 7`
+    (isMark(board, k, '°') && isCue(board, k - 1, 'number-sign'))
   )
     k++;
   if (k > i + 3) return undefined;
