@@ -1,11 +1,14 @@
 import { assertBetween } from '../bounds.ts';
 import { DAY_ms } from '../time/durations.ts';
+import { FREE_LOW_mg_L } from './free-expected.ts';
 
 /** One addition with free SO2 before and after it, mg/L; times in milliseconds since 1970. */
 export interface BindingCase {
   readonly at: number;
   readonly added_at: number;
   readonly added_mg_L: number;
+  /** When free SO2 was read before the addition. */
+  readonly before_at: number;
   readonly before_mg_L: number;
   readonly after_mg_L: number;
 }
@@ -24,6 +27,9 @@ export const CASES_FEWEST = 2;
 
 /** A reading later than so many days after the addition shows loss as well as binding (own threshold). */
 export const LANDED_WITHIN_days = 7;
+
+/** A reading longer than so many days before the addition would count loss as binding (own threshold). */
+export const READ_BEFORE_WITHIN_days = 7;
 
 /** An addition smaller than this is lost in the error of the readings, mg/L (own threshold). */
 export const CASE_SMALLEST_mg_L = 5;
@@ -45,11 +51,16 @@ interface Weighed {
 const shareOf = ({ before_mg_L, after_mg_L, added_mg_L }: BindingCase): number =>
   1 - (after_mg_L - before_mg_L) / added_mg_L;
 
-/** Whether an addition tells how the wine binds: large enough, read soon, and with figures that can be right. */
+/**
+ * Whether an addition tells how the wine binds: large enough, read soon before and after, with figures that can be right.
+ * Where almost nothing was free, all may bind at first, which tells nothing of the next addition.
+ */
 function isTelling(one: BindingCase): boolean {
   const share = shareOf(one);
   return (
     one.added_mg_L >= CASE_SMALLEST_mg_L &&
+    one.before_mg_L >= FREE_LOW_mg_L &&
+    one.added_at - one.before_at <= READ_BEFORE_WITHIN_days * DAY_ms &&
     one.at - one.added_at <= LANDED_WITHIN_days * DAY_ms &&
     share >= 0 &&
     share <= 1
@@ -68,7 +79,7 @@ function isTelling(one: BindingCase): boolean {
  *
  * @example
  * ```ts
- * const one = { at: 1, added_at: 0, added_mg_L: 30, before_mg_L: 18, after_mg_L: 36 };
+ * const one = { at: 1, added_at: 0, added_mg_L: 30, before_at: 0, before_mg_L: 18, after_mg_L: 36 };
  * learnBinding([one, { ...one, added_mg_L: 20, after_mg_L: 30 }])?.share // => 0.4
  * learnBinding([one, one])?.cases // => 2
  * learnBinding([one]) // => undefined

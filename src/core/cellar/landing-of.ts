@@ -39,6 +39,7 @@ export function landingOf(vessel: Vessel, sample: LandingSample): Landing | unde
     additions: went.map(({ entry }) => entry),
     added_at: first.at,
     added_mg_L,
+    before_at: before.at,
     before_mg_L: before.value,
     after_mg_L: sample.free_mg_L,
     bound_share: 1 - (sample.free_mg_L - before.value) / added_mg_L,

@@ -10,7 +10,7 @@ import type { Vessel } from './vessel.ts';
  * @example
  * ```ts
  * import { freshVessel } from './fresh-vessel.ts';
- * const landing = { entry: 3, at: 9, additions: [2], added_at: 5, added_mg_L: 30, before_mg_L: 18, after_mg_L: 36, bound_share: 0.4 };
+ * const landing = { entry: 3, at: 9, additions: [2], added_at: 5, added_mg_L: 30, before_at: 4, before_mg_L: 18, after_mg_L: 36, bound_share: 0.4 };
  * learnedOf({ ...freshVessel('tank 4', { entry: 1, at: 0 }), landings: [landing, landing] })?.share // => 0.4
  * learnedOf(freshVessel('tank 4', { entry: 1, at: 0 })) // => undefined
  * ```

@@ -39,6 +39,8 @@ export interface Landing {
   readonly additions: readonly number[];
   readonly added_at: number;
   readonly added_mg_L: number;
+  /** When free SO2 was read before. */
+  readonly before_at: number;
   readonly before_mg_L: number;
   readonly after_mg_L: number;
   /** 1 − rise ÷ addition; below 0 or above 1 where the figures cannot be right. */
@@ -94,6 +96,8 @@ export interface Vessel {
   readonly bound_before?: Learned;
   /** When the wine became another for the last time: it was blended, or fermented, or went through malolactic. */
   readonly changed_at?: number;
+  /** When it was racked, moved or partly taken for the last time: air came to it, and it may lie otherwise than before. */
+  readonly handled_at?: number;
   readonly orders: readonly OpenOrder[];
   readonly later?: number;
   readonly unwatched?: true;

@@ -22,6 +22,7 @@ function additionsOf(share: number, count: number, { even, normal }: Chance): Bi
       at: added_at + DAY_ms,
       added_at,
       added_mg_L,
+      before_at: added_at,
       before_mg_L: read(before),
       after_mg_L: read(after),
     });
@@ -55,6 +56,7 @@ test('recent additions weigh more', () => {
     at: i * 40 * DAY_ms,
     added_at: i * 40 * DAY_ms,
     added_mg_L: 30,
+    before_at: i * 40 * DAY_ms,
     before_mg_L: 20,
     after_mg_L: 20 + 30 * (1 - share),
   });
@@ -63,11 +65,13 @@ test('recent additions weigh more', () => {
   expect(rising?.spread).toBeGreaterThan(0.1);
 });
 
-test('what tells nothing is left out: too small, read too late, or with figures that cannot be', () => {
-  const good = { at: DAY_ms, added_at: 0, added_mg_L: 30, before_mg_L: 18, after_mg_L: 36 };
+test('what tells nothing is left out: too small, read too early or late, almost nothing free before, or with figures that cannot be', () => {
+  const good = { at: DAY_ms, added_at: 0, added_mg_L: 30, before_at: 0, before_mg_L: 18, after_mg_L: 36 };
   const bad = [
     { ...good, added_mg_L: 3, after_mg_L: 20 },
     { ...good, at: 20 * DAY_ms },
+    { ...good, before_at: -20 * DAY_ms },
+    { ...good, before_mg_L: 4, after_mg_L: 14 },
     { ...good, after_mg_L: 60 },
     { ...good, after_mg_L: 10 },
   ];
