@@ -23,10 +23,12 @@ export function applyChange(before: Vessel, change: Entry & VesselChange): Vesse
   switch (event) {
     case 'told':
       return told(before, change);
-    case 'racked':
+    case 'racked': {
+      const racked = { ...before, handled_at: at };
       return volume_L === undefined
-        ? withoutVolume(before, { event, at })
-        : withVolume(before, known(volume_L));
+        ? withoutVolume(racked, { event, at })
+        : withVolume(racked, known(volume_L));
+    }
     case 'topped':
       return withoutVolume(before, { event, at });
     case 'acid':

@@ -5,8 +5,8 @@ import { isBarrel } from './is-barrel.ts';
 import type { Vessel } from './vessel.ts';
 
 /**
- * The readings of free SO2 (mg/L) that show how this wine loses it: since its last addition, and since the wine is the
- * one it is.
+ * The readings of free SO2 (mg/L) that show how this wine loses it: since its last addition, since it was racked or
+ * moved, and since the wine is the one it is. Topping is part of how a barrel lies.
  *
  * Range: as many readings as a vessel keeps in sight.
  *
@@ -16,10 +16,12 @@ import type { Vessel } from './vessel.ts';
  * const tank = { ...freshVessel('tank 4', { entry: 1, at: 0 }), readings: [{ entry: 1, at: 0, free_mg_L: 30 }, { entry: 3, at: 9, free_mg_L: 28 }] };
  * freePoints(tank).length // => 2
  * freePoints({ ...tank, additions: [{ entry: 2, at: 5, by: 1 }] }).length // => 1
+ * freePoints({ ...tank, handled_at: 5 }).length // => 1
  * ```
  */
-export function freePoints({ readings, additions, changed_at = -Infinity }: Vessel): readonly FreePoint[] {
-  const since = Math.max(changed_at, ...additions.map(({ at }) => at));
+export function freePoints({ readings, additions, ...vessel }: Vessel): readonly FreePoint[] {
+  const { changed_at = -Infinity, handled_at = -Infinity } = vessel;
+  const since = Math.max(changed_at, handled_at, ...additions.map(({ at }) => at));
   return readings.flatMap(({ at, free_mg_L }) =>
     free_mg_L === undefined || at < since ? [] : [{ at, free_mg_L }],
   );

@@ -84,9 +84,10 @@ export function pour(
 function left(from: Vessel, { at, entry, volume_L }: Entry & VesselChange): Vessel {
   if (volume_L === undefined) return emptied(from, at);
   const rest = from.volume_L === undefined ? undefined : from.volume_L.value - volume_L;
-  if (rest === undefined) return from;
-  if (rest > 0) return withVolume(from, { value: rest, at, entry });
-  return withoutVolume(from, { event: 'moved', at });
+  if (rest === undefined) return { ...from, handled_at: at };
+  const opened = { ...from, handled_at: at };
+  if (rest > 0) return withVolume(opened, { value: rest, at, entry });
+  return withoutVolume(opened, { event: 'moved', at });
 }
 
 function filled(from: Vessel, to: Vessel, { at, entry, volume_L }: Entry & VesselChange): Vessel {
@@ -96,6 +97,7 @@ function filled(from: Vessel, to: Vessel, { at, entry, volume_L }: Entry & Vesse
   const arrived: Vessel = {
     ...wine,
     vessel: to.vessel,
+    handled_at: at,
     since,
     last_at: to.last_at,
     last_entry: to.last_entry,

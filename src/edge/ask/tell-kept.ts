@@ -21,6 +21,9 @@ const MOMENTS: readonly string[] = [
   'since',
   'last_at',
   'added_at',
+  'before_at',
+  'changed_at',
+  'handled_at',
   'empty',
   'later',
 ];

@@ -107,3 +107,24 @@ test('a forecast looks only at readings since the last addition, and of this win
   expect(freePoints(blended.get('T4') as Vessel)).toEqual([{ at: 3 * DAY_ms, free_mg_L: 31 }]);
   expect(forecastOf(blended.get('T4') as Vessel, 20)).toEqual({ by: 'none', why: 'no-rate' });
 });
+
+test('a forecast begins anew when the wine was racked, moved or partly taken, and not when it was topped', () => {
+  const readings = [read('T4', 30), read('T4', 29), read('T4', 28)];
+  const happens = (event: 'racked' | 'topped'): Happening => ({ kind: 'vessel', event, vessels: ['T4'] });
+  const pointsOf = (name: string, ...happenings: readonly Happening[]): number =>
+    freePoints(after(...happenings).get(name) as Vessel).length;
+  expect(pointsOf('T4', ...readings, happens('topped'), read('T4', 27))).toBe(4);
+  expect(pointsOf('T4', ...readings, happens('racked'), read('T4', 24))).toBe(1);
+  expect(pointsOf('T4', ...readings, brought('T4', 'T9', 100), read('T4', 24))).toBe(1);
+  expect(pointsOf('T9', ...readings, brought('T4', 'T9'), read('T9', 27), read('T9', 26))).toBe(2);
+});
+
+test('a reading of weeks before the addition, and one of almost no free SO2, teach nothing', () => {
+  const days = Array.from({ length: 9 }, () => read('T7', 20));
+  const old = [read('T4', 20), ...days, add('T4', 20), read('T4', 28), add('T4', 20), read('T4', 36)];
+  expect(shareOf(after(...old), 'T4')).toBeUndefined();
+  expect(shareOf(after(...dosed('T4', 0.4), read('T4', 4), add('T4', 30), read('T4', 12)), 'T4')).toBeCloseTo(
+    0.4,
+    9,
+  );
+});
