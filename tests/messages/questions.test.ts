@@ -1,8 +1,9 @@
 import { readFileSync } from 'node:fs';
-import { expect, test } from 'vitest';
+import { describe, expect, test } from 'vitest';
 import { readMessage } from '../../src/chat/reader/read-message.ts';
 import { isQuestion } from '../../src/chat/reader/question-topic.ts';
 import { READER_DEFAULTS } from '../../src/chat/reader/reader-defaults.ts';
+import type { Language } from '../../src/chat/reader/understood.ts';
 
 interface Question {
   readonly text: string;
@@ -15,12 +16,17 @@ const rowsOf = (name: string): Question[] =>
     .filter((row) => row !== '')
     .map((row) => JSON.parse(row) as Question);
 
-const readingOf = (text: string) => readMessage(text, READER_DEFAULTS).readings[0];
+/** The languages whose questions are tried: a language is added when all of its rows hold. */
+const TRIED: readonly Language[] = ['en', 'es'];
 
-test.each(rowsOf('questions.en.jsonl'))('$text: $topic, and no dose', ({ text, topic }) => {
-  expect(readingOf(text)).toMatchObject({ intent: 'chat', topic, asks: [], problems: [] });
-});
+describe.each(TRIED)('plain questions in %s', (language) => {
+  const readingOf = (text: string) => readMessage(text, { ...READER_DEFAULTS, language }).readings[0];
 
-test.each(rowsOf('no-questions.en.jsonl'))('$text is no question about the trade', ({ text }) => {
-  expect(isQuestion(readingOf(text)?.topic)).toBe(false);
+  test.each(rowsOf(`questions.${language}.jsonl`))('$text: $topic, and no dose', ({ text, topic }) => {
+    expect(readingOf(text)).toMatchObject({ intent: 'chat', topic, asks: [], problems: [] });
+  });
+
+  test.each(rowsOf(`no-questions.${language}.jsonl`))('$text is no question about the trade', ({ text }) => {
+    expect(isQuestion(readingOf(text)?.topic)).toBe(false);
+  });
 });
