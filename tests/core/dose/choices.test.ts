@@ -71,6 +71,26 @@ describe('a high need that nobody stated is a choice', () => {
     expect(codesOf(answer)).toContain('total-over-limit');
   });
 
+  test.each([
+    ['nothing is allowed for', {}, 20],
+    ['a third is', { binding_share: 1 / 3 }, 13.3],
+    ['a bottling is planned', { reserve_mg_L: 10 }, 10],
+  ])('before it stands the most that keeps 15 mg/L below the limit, where %s', (_what, facts, add_mg_L) => {
+    const { choices = [] } = doseOf({ ...RED, ph: 4.1, free_mg_L: 20, total_mg_L: 115, ...facts });
+    expect(choices.map(({ over_limit }) => over_limit ?? false)).toEqual([false, false, true, true]);
+    expect(choices[1]?.target).toEqual({ add_mg_L });
+    expect(choices[1]?.dose_mg_L).toBeLessThanOrEqual(20);
+  });
+
+  test.each([
+    ['hardly any room', { total_mg_L: 131 }],
+    ['an unknown total', { total_mg_L: undefined, target: { molecular_mg_L: 0.8 }, ph: 4.15 }],
+  ])('%s gives no such way', (_what, { total_mg_L, ...facts }) => {
+    const known = total_mg_L === undefined ? {} : { total_mg_L };
+    const { choices = [] } = doseOf({ ...RED, ph: 4.1, free_mg_L: 45, ...facts, ...known });
+    expect(choices.filter(({ target }) => target !== undefined && 'add_mg_L' in target)).toEqual([]);
+  });
+
   test('an option whose free SO2 alone passes the limit carries none either, with the total unknown', () => {
     const answer = doseOf({ ...RED, target: { molecular_mg_L: 0.8 }, ph: 4.15, free_mg_L: 45 });
     expect(answer.choices?.at(-1)).toMatchObject({ over_limit: true });
