@@ -1381,6 +1381,10 @@ landed =
         [none] { "" }
        *[other] , planned { $planned }
     }: of { $added } { $unit }, { $percent } % bound.
+landed-loose = { $vessel } landed at { $after }{ $planned ->
+        [none] { "" }
+       *[other] , planned { $planned }
+    }. What bound is not told: free SO2 before the { $added } { $unit } was read on { $day }.
 landed-fell = { $vessel } went from { $before } to { $after } although { $added } { $unit } went in: all bound, or a slip. Measure again.
 landed-too-high = { $vessel } rose by { $rise } although only { $added } { $unit } went in. One figure is off: measure again.
 on-it =
@@ -2146,6 +2150,7 @@ titration-asks = { $missing ->
 }
 titration-either = { $strength } N gives { $normal } { $unit }, { $strength } M gives { $molar } { $unit }.
 button-keep-result = Keep it
+button-keep-of = Keep { $vessel }
 
 # The laboratory: how far a dose may be off, tables, both bases
 
@@ -2160,6 +2165,8 @@ range-dose = { $vessel ->
     }, that is { $low }–{ $high } { $unit } SO2
 }.
 range-sure = After the dose you can be sure of { $molecular } { $unit } molecular, if what binds is as reckoned.
+range-sure-unbound = If nothing binds you can be sure of { $molecular } { $unit } molecular after the dose.
+range-sure-low = Below 10 { $unit } free all of a dose may bind: sure is only { $molecular } { $unit } molecular. Measure after a day.
 range-rests = Rests on pH ± { $ph } and free ± { $free } { $unit }{ $said ->
     [both] .
     [one] {" "}(what you did not say: common practice, no source).

@@ -90,6 +90,7 @@ export interface SentenceValues {
   'button-file-note': never;
   'button-file-vessels': never;
   'button-full-dose': never;
+  'button-keep-of': 'vessel';
   'button-keep-result': never;
   'button-mine': never;
   'button-more': never;
@@ -524,6 +525,7 @@ export interface SentenceValues {
   'lab-lacks': 'vessel' | 'what';
   landed: 'added' | 'after' | 'percent' | 'planned' | 'unit' | 'vessel';
   'landed-fell': 'added' | 'after' | 'before' | 'unit' | 'vessel';
+  'landed-loose': 'added' | 'after' | 'day' | 'planned' | 'unit' | 'vessel';
   'landed-too-high': 'added' | 'rise' | 'unit' | 'vessel';
   'language-changed': never;
   'language-not-yet': never;
@@ -750,6 +752,8 @@ export interface SentenceValues {
   'range-nothing': never;
   'range-rests': 'free' | 'ph' | 'said' | 'unit';
   'range-sure': 'molecular' | 'unit';
+  'range-sure-low': 'molecular' | 'unit';
+  'range-sure-unbound': 'molecular' | 'unit';
   read: 'list';
   'read-kept': 'list' | 'new' | 'vessel';
   'reading-kept': 'list' | 'vessel' | 'when';

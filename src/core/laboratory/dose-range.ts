@@ -1,5 +1,6 @@
 import { assertBetween, BOUNDS } from '../bounds.ts';
 import { doseFor } from '../binding/allowance.ts';
+import { FREE_LOW_mg_L } from '../binding/free-expected.ts';
 import { aimAt } from '../dose/aim.ts';
 import { freeToMolecular } from '../chemistry/free-to-molecular.ts';
 import type { DoseRange, RangeRequest } from './range-request.ts';
@@ -11,13 +12,18 @@ export const PH_PLUS_MINUS = 0.05;
 /** ± of free SO2 as it is usually measured, in per cent: two standard deviations (common practice, no source). */
 export const FREE_PLUS_MINUS_percent = 10;
 
+/** No titration is nearer than this, mg/L: a drop of 0.05 mL at 16 mg/L a mL (common practice, no source). */
+export const FREE_PLUS_MINUS_LEAST_mg_L = 1;
+
 /**
  * How far a dose may be off because pH and free SO2 are: both errors are taken as independent and normal, each ± as
- * two standard deviations, and the formula is of first order. SO2 in mg/L, pH without unit.
+ * two standard deviations, and the formula is of first order. Below 10 mg/L free nothing of the dose is counted as sure.
+ * SO2 in mg/L, pH without unit.
  *
  * @throws RangeError outside `BOUNDS`, and for a ± of a pH above 0.5
  *
- * Source: propagation of independent errors (general); ± 0.05 and ± 10 %: common practice, no source.
+ * Source: propagation of independent errors (general); ± 0.05 and ± 10 % (1 mg/L at least): common practice, no
+ * source.
  *
  * @example
  * ```ts
@@ -31,7 +37,7 @@ export function doseRange(request: RangeRequest): DoseRange {
   const { ph, free_mg_L, target, dissociation } = request;
   const {
     ph_plus_minus = PH_PLUS_MINUS,
-    free_plus_minus_mg_L = (free_mg_L * FREE_PLUS_MINUS_percent) / 100,
+    free_plus_minus_mg_L = Math.max(FREE_PLUS_MINUS_LEAST_mg_L, (free_mg_L * FREE_PLUS_MINUS_percent) / 100),
   } = request;
   assertBetween('tell the range of a dose', 'ph_plus_minus', ph_plus_minus, 0, 0.5);
   assertBetween(
@@ -52,7 +58,8 @@ export function doseRange(request: RangeRequest): DoseRange {
   const gain = doseFor(1, request);
   const low = Math.max(0, rise - rise_plus_minus) * gain;
   const high = Math.max(0, rise + rise_plus_minus) * gain;
-  const after_mg_L = Math.max(needed_mg_L, free_mg_L);
+  // Where almost nothing is free all of an addition may bind: sure is only what is there.
+  const after_mg_L = free_mg_L < FREE_LOW_mg_L ? free_mg_L : Math.max(needed_mg_L, free_mg_L);
   const relative =
     after_mg_L === 0
       ? 0

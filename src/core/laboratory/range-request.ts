@@ -22,7 +22,8 @@ export interface DoseRange {
   /** Without unit. */
   readonly ph_plus_minus: number;
   readonly free_plus_minus_mg_L: number;
-  /** Molecular SO2 after the dose that the errors of pH and free SO2 leave one sure of, if what binds is as reckoned. */
+  /** Molecular SO2 after the dose that the errors of pH and free SO2 leave one sure of, if what binds is as reckoned; below
+   * 10 mg/L free only what is there already. */
   readonly molecular_sure_mg_L: number;
   readonly steps: readonly Step[];
 }

@@ -43,7 +43,7 @@ test.each(WINES)(
 );
 
 // Below two standard deviations lie 2.3 of 100 (tables of the normal distribution).
-test.each(WINES)(
+test.each(WINES.filter((wine) => wine.free_mg_L >= 10))(
   'after the dose, 97.7 % (± 1) of such wines have the molecular SO2 that one is sure of (pH $ph)',
   ({ ph, free_mg_L, molecular_mg_L }) => {
     const range = doseRange({ ph, free_mg_L, target: { molecular_mg_L }, dissociation });
@@ -97,4 +97,14 @@ test.each(WINES)('each line of the working holds and leads to the range (pH $ph)
   expect(of('dose-lowest')).toBeCloseTo(range.dose_mg_L[0], 1);
   expect(of('dose-highest')).toBeCloseTo(range.dose_mg_L[1], 1);
   expect(of('molecular-sure')).toBeCloseTo(range.molecular_sure_mg_L, 2);
+});
+
+test('where nothing or almost nothing is free, nothing of the dose is counted as sure', () => {
+  const of = (free_mg_L: number): ReturnType<typeof doseRange> =>
+    doseRange({ ph: 3.3, free_mg_L, target: { molecular_mg_L: 0.8 }, dissociation });
+  expect(of(0).molecular_sure_mg_L).toBe(0);
+  expect(of(0).free_plus_minus_mg_L).toBe(1);
+  expect(of(9).molecular_sure_mg_L).toBeLessThan(molecularSO2(9, 3.3, pK));
+  expect(of(9).molecular_sure_mg_L).toBeGreaterThan(0);
+  expect(of(10).molecular_sure_mg_L).toBeGreaterThan(0.6);
 });

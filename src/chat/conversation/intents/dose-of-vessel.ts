@@ -54,13 +54,14 @@ function emptyLines({ fields }: Reading, { here }: Turn): Line[] {
 }
 
 /** Where the additions before this sample landed. */
-function landedAt(reading: Reading, { here, manner }: Turn): Line[] {
+function landedAt(reading: Reading, turn: Turn): Line[] {
+  const { here } = turn;
   const { vessel: name, free_mg_L } = saidFields(reading);
   const vessel = name === undefined ? undefined : here.vessels.get(name);
   if (vessel === undefined || free_mg_L === undefined) return [];
   if (reading.marks.conditional || reading.noted?.includes('free_mg_L')) return [];
   const landing = landingOf(vessel, { entry: here.nextEntry, at: whenOf(reading, here).at, free_mg_L });
-  return landing ? landedLines(vessel.vessel, landing, manner) : [];
+  return landing ? landedLines(vessel.vessel, landing, turn) : [];
 }
 
 /** Keeps what is to be weighed, so that an addition told later is known to be it. */

@@ -102,7 +102,7 @@ function landedToday(reading: Reading, dosed: Dosed, free_mg_L: number, turn: Tu
   const isNoted = reading.noted?.includes('free_mg_L') === true;
   const landing = isNoted ? dosed.vessel.landings.at(-1) : landingOf(dosed.vessel, sample);
   const lines = [
-    ...(landing ? landedLines(dosed.vessel.vessel, landing, manner) : []),
+    ...(landing ? landedLines(dosed.vessel.vessel, landing, turn) : []),
     dosedLine(dosed, 'dosed-landed', turn),
   ];
   return {

@@ -35,9 +35,10 @@ export function answerReading(reading: Reading, turn: Turn): Outcome {
   };
 }
 
-function landed({ fields }: Reading, at: number, { here, manner }: Turn): Line[] {
+function landed({ fields }: Reading, at: number, turn: Turn): Line[] {
+  const { here } = turn;
   const vessel = fields.vessel === undefined ? undefined : here.vessels.get(fields.vessel);
   if (vessel === undefined || fields.free_mg_L === undefined) return [];
   const landing = landingOf(vessel, { entry: here.nextEntry, at, free_mg_L: fields.free_mg_L });
-  return landing ? landedLines(vessel.vessel, landing, manner) : [];
+  return landing ? landedLines(vessel.vessel, landing, turn) : [];
 }

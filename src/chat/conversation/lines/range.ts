@@ -1,3 +1,4 @@
+import { FREE_LOW_mg_L } from '../../../core/binding/free-expected.ts';
 import type { Reading } from '../../reader/understood.ts';
 import { numberText } from '../../replies/number-text.ts';
 import { concentrationText, massText, molecularText } from '../../replies/quantity-text.ts';
@@ -24,7 +25,7 @@ export function rangeLines(reading: Reading, data: RangeData, manner: Manner, ro
       amount: amountOf(data, manner),
       count: countOf(reading) === undefined ? 'one' : 'several',
     }),
-    line(room, 'range-sure', { molecular: molecularText(data.molecular_sure_mg_L, mark), unit }),
+    line(room, sureKey(reading), { molecular: molecularText(data.molecular_sure_mg_L, mark), unit }),
     line('assumed', 'range-rests', {
       ph: numberText(data.ph_plus_minus, 3, mark),
       free: numberText(data.free_plus_minus_mg_L, 1, mark),
@@ -37,6 +38,13 @@ export function rangeLines(reading: Reading, data: RangeData, manner: Manner, ro
             : 'none',
     }),
   ];
+}
+
+/** What is sure hangs on what binds: on a share that was said, on none at all, or on nothing where all may bind. */
+function sureKey({ fields }: Reading): 'range-sure' | 'range-sure-unbound' | 'range-sure-low' {
+  if (fields.free_mg_L !== undefined && fields.free_mg_L < FREE_LOW_mg_L) return 'range-sure-low';
+  const isStated = fields.binding_share !== undefined || fields.binding_allowance_percent !== undefined;
+  return isStated ? 'range-sure' : 'range-sure-unbound';
 }
 
 /** A figure without its unit, where the one behind it has the same. */
