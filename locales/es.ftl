@@ -378,8 +378,8 @@ bottling-each =
         [formula] 4 por 1, por fórmula
        *[other] { $each } por 1, como dices
     }
-bottling-measured = En cifras del sector (sin confirmar) se mide { $each } por 1: bastaría { bare-amount }. Para calcular así: oxígeno { $oxygen } mg/L a { $each }
-bottling-measured-none = En cifras del sector (sin confirmar) se mide { $each } por 1: no haría falta nada. Para calcular así: oxígeno { $oxygen } mg/L a { $each }
+bottling-measured = En cifras del sector (sin confirmar) se mide { $each } por 1: bastaría { bare-amount }. Para calcular así: oxígeno { $oxygen } mg/L x { $each }
+bottling-measured-none = En cifras del sector (sin confirmar) se mide { $each } por 1: no haría falta nada. Para calcular así: oxígeno { $oxygen } mg/L x { $each }
 condition-stage = Solo si la maloláctica está hecha o no se quiere.
 condition-red =
     { $kind ->
@@ -632,8 +632,8 @@ ask-ph = { at }¿qué pH? Por ejemplo: 3,58
 ask-free_mg_L = { at }¿qué SO2 libre, en { $unit }? Por ejemplo: 21
 ask-target =
     { $usual ->
-        [none] { at }¿qué objetivo? Un vino así no tiene uno habitual. Por ejemplo: a 30 de libre, 0,6 molecular, añadir 25 ppm
-       *[some] { at }¿qué objetivo? Por ejemplo: a 30 de libre, 0,6 molecular, añadir 25 ppm
+        [none] { at }¿qué objetivo? Un vino así no tiene uno habitual. Por ejemplo: objetivo 30, 0,6 molecular, añadir 25 ppm
+       *[some] { at }¿qué objetivo? Por ejemplo: objetivo 30, 0,6 molecular, añadir 25 ppm
     }
 ask-target-stage =
     { $stage ->
@@ -868,10 +868,10 @@ help-must-5 = 5 t uva 70 L/100 kg añadir 50 → lo mismo con una cifra tuya
 help-must-6 = rendimiento 65 → fija el rendimiento habitual, litros de 100 kg
 help-must-7 = La mayor parte se combina: luego no protege, y un tercio más o menos vuelve como SO2 total.
 help-bottling-1 = Lo que tiene que haber ahora para que el objetivo aguante cuando el oxígeno gaste su parte.
-help-bottling-2 = embotellado T4 40 hl pH 3,4 libre 22 oxígeno 2 mg/L → 4 de SO2 por 1 de oxígeno, por fórmula
-help-bottling-3 = embotellado T4 40 hl pH 3,4 libre 22 oxígeno 2 mg/L a 2,5 → con una cifra tuya
-help-bottling-4 = T4 40 hl pH 3,4 libre 22 total 90 reservar 20 para embotellado → margen que se guarda bajo el límite
-help-bottling-5 = T4 en maloláctica pH 3,4 libre 25 total 60 → si la maloláctica puede arrancar; también parada: un rearranque
+help-bottling-2 = embotellar T4 40 hl pH 3,4 libre 22 oxígeno 2 mg/L → 4 de SO2 por 1 de oxígeno, por fórmula
+help-bottling-3 = embotellar T4 40 hl pH 3,4 libre 22 oxígeno 2 mg/L x 2,5 → con una cifra tuya
+help-bottling-4 = T4 40 hl pH 3,4 libre 22 total 90 reservar 20 para embotellar → margen que se guarda bajo el límite
+help-bottling-5 = T4 en maloláctica pH 3,4 libre 25 total 60 → si la maloláctica puede arrancar; también fermentación parada: un rearranque
 help-bottling-6 = Oxígeno: disuelto y de cabeza juntos, en mg/L de vino.
 help-solutions-1 = Soluciones en agua: ninguna es una dosis para el vino, y nada de ellas va al registro.
 help-solutions-2 = preparar 5 L de meta al 10% → una solución: qué pesar, qué fuerza tiene, mL por barrica
@@ -887,7 +887,7 @@ help-law-4 = límite tinto azúcar 3 UE → sin depósito
 help-law-5 = T4 tinto → deciden color y azúcar (azúcar 3 con una lectura); sin dato vale lo más estricto
 help-law-6 = T4 ecológico → también espumoso de calidad, DOP, granel, densidad 0,992
 help-law-7 = T4 con denominación 300 → un dulce de una denominación; también T4 año declarado
-help-law-8 = T4 reservar 30 para embotellado → se guarda bajo el límite, con 15 por el error de medida
+help-law-8 = T4 reservar 30 para embotellar → se guarda bajo el límite, con 15 por el error de medida
 help-law-9 = Si lo pasa, primero va la dosis menor: dosis completa, luego sí. El registro lo guarda.
 help-round-1 = Muchos depósitos en un mensaje, una línea cada uno; lo que vale para todos (meta, objetivo 30) en la primera. Un toque lo anota todo, o línea a línea.
 help-round-2 = T1 20 hl pH 3,4 libre 18 → como línea de ella; sumo lo que hay que traer
@@ -2041,7 +2041,7 @@ question-no-sulfite-why = La levadura hace algo por su cuenta, normalmente menos
 question-no-sulfite-next = Lo que tiene: T4 pH 3,5 libre 5
 question-bottling = Mide unos días antes; la última adición va antes de arrancar la línea, mezclada y medida.
 question-bottling-why = Cada mg/L de oxígeno que entra puede gastar hasta 4 mg/L de libre (por fórmula).
-question-bottling-next = Con su oxígeno: embotellado T4 40 hl pH 3,4 libre 22 oxígeno 2 mg/L
+question-bottling-next = Con su oxígeno: embotellar T4 40 hl pH 3,4 libre 22 oxígeno 2 mg/L
 
 ## El almacén de productos
 stock-tablets =

@@ -20,12 +20,18 @@ function readInvite(talk: Talk): Command | undefined {
   return { name: 'invite', ...(role !== undefined && { role }) };
 }
 
+/** `persona 3`: the number that a sheet gives to somebody without a name, in words of any language. */
+function numbered([word, number, more]: readonly Piece[]): string | undefined {
+  const isNumber = more === undefined && number?.kind === 'number' && /^\d{1,6}$/.test(number.text);
+  return isNumber && word?.ids.includes('as-role') ? `person ${number.text}` : undefined;
+}
+
 /** `remove Ben`. */
 function readRemove({ board, said }: Talk): Command | undefined {
   const at = said.findIndex(({ ids }) => !ids.includes('filler'));
   const piece = said[at];
   if (piece?.ids.includes('remove') !== true) return undefined;
-  const who = textBehind(board, piece);
+  const who = numbered(said.slice(at + 1)) ?? textBehind(board, piece);
   return isPerson(who) && !said.slice(at + 1).some(isOfTheBot) ? { name: 'remove-person', who } : undefined;
 }
 
@@ -42,7 +48,7 @@ function readMake({ board, said }: Talk): Command | undefined {
   if (!isStated && first?.ids.includes('make-role') !== true) return undefined;
   const named = isStated ? before.slice(0, -1) : before.slice(1);
   const behind = isStated ? is : (said[before.length] ?? last);
-  const who = textBetween(board, isStated ? undefined : first, behind);
+  const who = numbered(named) ?? textBetween(board, isStated ? undefined : first, behind);
   if (named.length === 0 || named.some(isOfTheBot) || !isPerson(who)) return undefined;
   return { name: 'make-person', who, role };
 }

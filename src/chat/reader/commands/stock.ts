@@ -37,7 +37,8 @@ const OF_STOCK = new Set(['additive', 'strength_percent', 'tablet_SO2_g', 'table
 
 /** `25 kg de meta`: in many languages one word says from and of; behind it is a figure, or what came in. */
 const isOfWhat = ({ terms }: Board, i: number): boolean =>
-  terms[i]?.kind === 'number' || terms[i]?.tags.some((tag) => tag.startsWith('additive:')) === true;
+  terms[i]?.kind === 'number' ||
+  terms[i]?.tags.some((tag) => tag.startsWith('additive:') || tag === 'label:so2') === true;
 
 /** Whom it came from; a vessel is no supplier. */
 function supplierIn(board: Board): Stretch | undefined {
@@ -110,6 +111,7 @@ const isRead = (board: Board): boolean =>
       (piece.kind === 'mark' && /^[,.;:!?()=-]$/.test(piece.text)) ||
       isCue(board, piece.from, 'solution') ||
       isCue(board, piece.from, 'powder') ||
+      isCue(board, piece.from, 'at-strength') ||
       piece.ids.some((id) => ALLOWED.includes(id)),
   ) && !board.terms.some((_, i) => isFree(board, i));
 
