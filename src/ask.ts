@@ -2,6 +2,8 @@ import { enableCompileCache } from 'node:module';
 
 // As in main.ts: what was compiled is kept between runs.
 enableCompileCache();
+const { resolveOwnFiles } = await import('./edge/resolve-own-files.ts');
+resolveOwnFiles();
 
 const { runAsk } = await import('./edge/ask/run-ask.ts');
 

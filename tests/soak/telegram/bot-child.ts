@@ -6,5 +6,7 @@ import { enableCompileCache } from 'node:module';
 
 // As the program does.
 enableCompileCache();
+const { resolveOwnFiles } = await import('../../../src/edge/resolve-own-files.ts');
+resolveOwnFiles();
 
 await import('./serve-child.ts');
