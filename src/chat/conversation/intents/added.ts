@@ -15,6 +15,7 @@ import type { Outcome, Turn } from '../outcome.ts';
 import { additiveOf } from '../to-requests.ts';
 import { addedRequestOf } from '../added-request-of.ts';
 import { whenOf } from '../when.ts';
+import { addedEach } from './added-each.ts';
 import { missing } from './missing.ts';
 import { whenIsUnclear } from './when-unclear.ts';
 import { notedAddition } from './noted-addition.ts';
@@ -30,6 +31,12 @@ export function answerAdded(reading: Reading, turn: Turn): Outcome {
   const when = whenOf(reading, turn.here);
   const answer = added(addedRequestOf(reading, turn.here));
   if (isWorkedOut(reading)) return confirmed(reading, answer, turn);
+  const below = [
+    ...(when.is === 'noon' ? [line('assumed', 'when-noon')] : []),
+    ...factLines(reading, turn.manner),
+    ...assumedLines(reading, turn.manner),
+  ];
+  if ((reading.fields.vessels?.length ?? 1) > 1) return addedEach(reading, answer, below, turn);
   const addition = additionOf(reading, answer, turn.here);
   const noted = notedAddition({ happening: addition, at: when.at }, turn);
   const { manner } = turn;
@@ -43,9 +50,7 @@ export function answerAdded(reading: Reading, turn: Turn): Outcome {
         manner,
       ),
       ...noted.lines.slice(1),
-      ...(when.is === 'noon' ? [line('assumed', 'when-noon')] : []),
-      ...factLines(reading, manner),
-      ...assumedLines(reading, manner),
+      ...below,
       ...workingLines(answer.steps, manner),
     ],
   };

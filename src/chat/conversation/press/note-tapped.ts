@@ -87,12 +87,14 @@ const MOST_ODD = 5;
 export async function undoBarrels(ref: string, here: Here, view: CellarView): Promise<Handled> {
   const found = await rememberedHere(ref, here, view);
   if (found === undefined) return replying(here, { lines: [line('first', 'old-button')] });
-  const near = await withVessels(here, view, vesselsIn(found.reading.fields));
-  return undoMany(
-    doseAdditions(found, near).map(({ key }) => key),
-    near,
-    view,
-  );
+  const vessels = vesselsIn(found.reading.fields);
+  const near = await withVessels(here, view, vessels);
+  // What somebody told was noted under the same keys as what a button notes.
+  const keys =
+    found.reading.intent === 'added'
+      ? vessels.map((vessel) => buttonKey('dose', found.chat, found.ref, vessel))
+      : doseAdditions(found, near).map(({ key }) => key);
+  return undoMany(keys, near, view);
 }
 
 async function rememberedHere(ref: string, here: Here, view: CellarView): Promise<Remembered | undefined> {
