@@ -11,7 +11,7 @@ import { CHOICES_APART_mg_L, FREE_NEED_HIGH_mg_L } from './thresholds.ts';
 /**
  * The ways out where the need is high and nobody stated the target: leave it, go to 60 mg/L free, the full target.
  * 60 falls away where it is less than 5 mg/L from one of the others. One whose free or predicted total SO2 passes the
- * limit on file carries no amount; before it stands the most that keeps below the limit, where that is 5 mg/L or more.
+ * limit on file carries no amount; where all do, the most that keeps below the limit stands before them, from 5 mg/L on.
  *
  * @param request with pH and free SO2 (mg/L, not negative)
  * @param full the target in full, mg/L
@@ -56,12 +56,11 @@ export function choicesFor(
   const between = free_mg_L < FREE_NEED_HIGH_mg_L && isApart(leave) && isApart(all);
   const ways = between ? [leave, to60, all] : [leave, all];
   const most_mg_L = mostBelowLimit(room);
-  const first = ways.findIndex(({ over_limit }) => over_limit);
-  const within_mg_L = ways[first - 1]?.dose_mg_L ?? 0;
+  const isOver = ways.slice(1).every(({ over_limit }) => over_limit);
   // What is added to allow for binding goes in as well.
   const rise_mg_L = Math.floor((most_mg_L / doseFor(1, request)) * 10) / 10;
-  return first > 0 && most_mg_L - within_mg_L >= CHOICES_APART_mg_L
-    ? ways.toSpliced(first, 0, choice({ add_mg_L: rise_mg_L }, most_mg_L))
+  return isOver && most_mg_L >= CHOICES_APART_mg_L
+    ? ways.toSpliced(1, 0, choice({ add_mg_L: rise_mg_L }, most_mg_L))
     : ways;
 }
 
