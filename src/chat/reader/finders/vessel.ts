@@ -209,6 +209,17 @@ function leftOut(board: Board, first: Named, to: number): { numbers: readonly nu
   return { numbers, to: end };
 }
 
+/** `tanks 4 and 5`: where the number of another vessel stands, which is never its free SO2. */
+function anotherNumber(board: Board, { kind, from, to }: Named): number | undefined {
+  const isAnother =
+    kindOf(board, from) === kind &&
+    saysMany(termAt(board, from)) &&
+    isCue(board, to + 1, 'and') &&
+    isWholeAt(board, to + 2) &&
+    !hasOwnUnit(board, to + 2);
+  return isAnother ? to + 2 : undefined;
+}
+
 /** Finds the vessel: a tank or barrel word with its number, or a code; `B1-B24` is that many vessels. */
 export function findVessel(board: Board): void {
   for (let i = 0; i < board.terms.length; i++) {
@@ -218,6 +229,12 @@ export function findVessel(board: Board): void {
     const last = rangeEnd(board, named);
     if (last) {
       i = findRange(board, named, last);
+      continue;
+    }
+    const another = anotherNumber(board, named);
+    if (another !== undefined) {
+      refuse(board, 'ambiguous-number', named.from, another);
+      i = another;
       continue;
     }
     find(board, 'vessel', named.name, 'labelled', named.from, named.to);
