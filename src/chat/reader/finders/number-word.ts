@@ -1,5 +1,5 @@
 import type { Board } from '../board.ts';
-import { hasTag, isCue, refuse } from '../board.ts';
+import { hasTag, isCue, isMark, refuse, saysMany, termAt } from '../board.ts';
 import { MASS_UNITS, VOLUME_UNITS, concentrationAt, unitAt } from '../units.ts';
 
 const isCounted = (board: Board, i: number): boolean =>
@@ -10,6 +10,16 @@ const isCounted = (board: Board, i: number): boolean =>
   ['vessel:barrel', 'vessel:cask', 'additive:campden'].some((tag) =>
     hasTag(board, i, tag as 'vessel:barrel'),
   );
+
+/** `two tanks of 20 hl`: each of them or both together, nobody can tell. */
+function areTanks(board: Board, i: number): boolean {
+  if (!hasTag(board, i, 'vessel:tank') || !saysMany(termAt(board, i))) return false;
+  const joins =
+    isMark(board, i + 1, ',') || (['of', 'from', 'with'] as const).some((cue) => isCue(board, i + 1, cue));
+  const figure = joins ? i + 2 : i + 1;
+  const isVolume = VOLUME_UNITS.some((unit) => hasTag(board, figure + 1, `unit:${unit}`));
+  return board.terms[figure]?.kind === 'number' && isVolume;
+}
 
 /** `half full`, `2/3 full`: how much is in the tank nobody can tell from its size. */
 const isShare = (board: Board, i: number): boolean =>
@@ -30,7 +40,8 @@ export function findNumberWord(board: Board): void {
       isCue(board, i + 1, 'of') || isCue(board, i + 1, 'article') || isCue(board, i + 1, 'number-word')
         ? i + 2
         : i + 1;
-    if (isCounted(board, to) && board.taken[to] !== true) refuse(board, 'ambiguous-number', i, to);
+    if (areTanks(board, to) || (isCounted(board, to) && board.taken[to] !== true))
+      refuse(board, 'ambiguous-number', i, to);
     else if (
       board.terms[i - 1]?.tags.some((tag) => /^label:(free|total|ph)$/.test(tag)) &&
       !isCue(board, i, 'plain')
