@@ -60,6 +60,8 @@ const ALONE: ReadonlySet<Command['name']> = new Set<Command['name']>([
   'at',
   'name-cellar',
   'read-along',
+  'set',
+  'set-wrong',
 ]);
 
 function readLine(terms: readonly Term[], setBoard: SetBoard): LineRead {
@@ -85,10 +87,23 @@ function readLine(terms: readonly Term[], setBoard: SetBoard): LineRead {
   };
 }
 
-/** Whether the lines are a round: two with a vessel, all different, or two with a volume. */
+const isTitration = ({ draft }: LineRead): boolean => draft.intent === 'titration';
+
+/** What no second line may have: a vessel, or of a titration the vessel with free or total. */
+function named(lines: readonly LineRead[]): readonly string[] {
+  const others = new Set(lines.filter((one) => !isTitration(one)).flatMap(({ vessel }) => vessel ?? []));
+  return lines.flatMap((one) => {
+    if (one.vessel === undefined) return [];
+    const isApart = isTitration(one) && !others.has(one.vessel);
+    return isApart ? `${one.vessel} ${one.draft.titration?.of ?? 'free'}` : one.vessel;
+  });
+}
+
+/** Whether the lines are a round: two with a vessel, all different, two with a volume, or two titrations. */
 function isRound(lines: readonly LineRead[]): boolean {
-  const vessels = lines.flatMap(({ vessel }) => vessel ?? []);
+  const vessels = named(lines);
   if (new Set(vessels).size < vessels.length) return false;
+  if (lines.filter(isTitration).length >= 2) return true;
   return vessels.length >= 2 || lines.filter(({ hasVolume }) => hasVolume).length >= 2;
 }
 
@@ -200,8 +215,14 @@ export function readRound(
   const read = lines.map((terms) => readLine(terms, setBoard));
   if (!isRound(read)) return undefined;
   const byVessel = read.filter(({ vessel }) => vessel !== undefined).length >= 2;
-  const opens = (line: LineRead): boolean => (byVessel ? line.vessel !== undefined : line.hasVolume);
   const [first] = read as [LineRead];
+  // `AO 20 mL sample 0.01 N` above `T4 1.9` and `T5 1.2`: what holds for all their titrations.
+  const lab =
+    first.vessel === undefined && first.draft.titration?.titrant_mL === undefined && isTitration(first);
+  const opens = (line: LineRead): boolean => {
+    if (isTitration(line)) return !(lab && line === first);
+    return byVessel ? line.vessel !== undefined : line.hasVolume;
+  };
   const isPast = first.isPast && !opens(first);
   const isShared = !opens(first) && carriesFacts(first) && first.draft.problems.length === 0;
   const shared = isShared ? { ...first.draft, fields: sharedFields(first.draft.fields) } : undefined;
@@ -211,7 +232,9 @@ export function readRound(
     const [line] = group;
     if (!line) return notUnderstood(setBoard([]));
     if (line.leftover) return notUnderstood(setBoard(line.terms));
-    const draft = draftOf(group, setBoard, { isPast, isMixed });
+    const draft = lab
+      ? readTogether([first, ...group], setBoard, false)
+      : draftOf(group, setBoard, { isPast, isMixed });
     return finishReading(withHeading(withShared(draft, shared), heading), settings, shared?.fields);
   });
   return { readings, shared: shared?.fields ?? {} };
