@@ -77,6 +77,9 @@ function hitsByLanguage(words: readonly string[]): Map<Language, Map<DangerId, H
       found.set(language, hits);
     }
   }
+  // A manner of speaking in one language is none of the danger that another reads in the same words.
+  const idioms = [...found.values()].flatMap((hits) => hits.get('idiom') ?? []);
+  if (idioms.length > 0) for (const hits of found.values()) hits.set('idiom', idioms);
   return found;
 }
 

@@ -53,7 +53,8 @@ function isAdded(board: Board): boolean {
     any(board, 'added_mg_L', 'rate_mg_L') ||
     refused(board, 'unknown-additive') ||
     refused(board, 'ambiguous-number');
-  const isOnlyDone = !board.terms.some((_, i) => isCue(board, i, 'past') && !isCue(board, i, 'only-done'));
+  const isVerb = (i: number): boolean => isCue(board, i, 'past') || isCue(board, i, 'past-if-accented');
+  const isOnlyDone = !board.terms.some((_, i) => isVerb(i) && !isCue(board, i, 'only-done'));
   return (
     said ||
     (hasAdditive(board) && !isOnlyDone) ||
