@@ -1410,6 +1410,10 @@ landed =
         [none] { "" }
        *[other] , prévu { $planned }
     } : sur { $added } { $unit }, { $percent } % combinés.
+landed-loose = { $vessel } est arrivé à { $after }{ $planned ->
+        [none] { "" }
+       *[other] , prévu { $planned }
+    }. La part combinée n’est pas dite : le libre avant les { $added } { $unit } a été lu le { $day }
 landed-fell = { $vessel } est passé de { $before } à { $after } malgré { $added } { $unit } ajoutés : tout combiné, ou une erreur. Remesurer.
 landed-too-high = { $vessel } a monté de { $rise } pour seulement { $added } { $unit } ajoutés. Un chiffre est faux : remesurer.
 on-it =
@@ -2175,6 +2179,10 @@ titration-asks = { $missing ->
 }
 titration-either = { $strength } N donne { $normal } { $unit }, { $strength } M donne { $molar } { $unit }.
 button-keep-result = Garder
+button-keep-of = Garder { $vessel }{ $of ->
+    [total] {" "}total
+   *[free] {""}
+}
 
 # The laboratory: how far a dose may be off, tables, both bases
 
@@ -2189,6 +2197,8 @@ range-dose = { $vessel ->
     }, soit { $low }–{ $high } { $unit } de SO2
 }.
 range-sure = Après la dose, { $molecular } { $unit } moléculaire sont sûrs, si ce qui se combine est comme compté.
+range-sure-unbound = Si rien ne se combine, { $molecular } { $unit } moléculaire sont sûrs après la dose.
+range-sure-low = Sous 10 { $unit } de libre, toute la dose peut se combiner : sûr n’est que { $molecular } { $unit } moléculaire. Mesurer après un jour.
 range-rests = Repose sur pH ± { $ph } et libre ± { $free } { $unit }{ $said ->
     [both] .
     [one] {" "}(ce que tu n’as pas dit : pratique courante, sans source).
