@@ -76,6 +76,13 @@ function findReserve(board: Board, i: number): void {
   find(board, 'reserve_mg_L', mg_L, 'labelled', i, end);
 }
 
+/** `bulk red`, `T9 bulk`: one word alone is of the wine, and not of a tank or a price. */
+function isOfWine(board: Board, i: number): boolean {
+  const next = board.terms[i + 1];
+  const isPhrase = /[ -]/.test(termAt(board, i).text);
+  return isPhrase || next?.kind !== 'word' || next.tags.some((tag) => tag.startsWith('style:'));
+}
+
 /** Finds what only the law asks about a wine: a designation, a declared year, its density, what is kept for bottling. */
 export function findLawFacts(board: Board): void {
   const isOfMust = ['must', 'fermenting'].some((stage) =>
@@ -87,7 +94,7 @@ export function findLawFacts(board: Board): void {
     else if (isCue(board, i, 'declared-year')) find(board, 'uplift', true, 'labelled', i, i);
     else if (isCue(board, i, 'undeclared-year')) find(board, 'uplift', false, 'labelled', i, i);
     else if (isCue(board, i, 'pdo')) find(board, 'pdo', true, 'labelled', i, i);
-    else if (isCue(board, i, 'bulk')) find(board, 'bulk', true, 'labelled', i, i);
+    else if (isCue(board, i, 'bulk') && isOfWine(board, i)) find(board, 'bulk', true, 'labelled', i, i);
     else if (isCue(board, i, 'density') && !isOfMust && !isFound(board, 'density_kg_L'))
       findDensity(board, i);
     else if (isCue(board, i, 'keep') || isCue(board, i, 'bottling-reserve')) findReserve(board, i);

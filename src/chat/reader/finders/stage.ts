@@ -50,7 +50,15 @@ function stopsFerment(board: Board, i: number): boolean {
   if (!isCue(board, i, 'stop')) return false;
   for (let k = i + 1; k <= i + 4; k++)
     if (isCue(board, k, 'ferment') || hasTag(board, k, 'stage:fermenting')) return true;
-  return false;
+  return stopsIt(board, i + 1);
+}
+
+/** `stuck at 12 g/L, I want to stop it`, `stop T7 at 40 g/L sugar`: what ferments stands before, or is a vessel with sugar. */
+function stopsIt(board: Board, i: number): boolean {
+  const isCoded = board.terms[i]?.kind === 'word' && board.terms[i + 1]?.kind === 'number';
+  const isIt = isCue(board, i, 'pronoun') || hasTag(board, i, 'vessel:tank') || isCoded;
+  const { cues } = board;
+  return isIt && (cues.has('stage:fermenting') || cues.has('cue:ferment') || cues.has('label:sugar'));
 }
 
 /**

@@ -46,7 +46,8 @@ function settleTotal(board: Board): void {
 function settleVessels(board: Board): void {
   const [one, many] = [findingOf(board, 'vessel'), findingOf(board, 'vessels')];
   if (!one || !many) return;
-  board.problems.push({ code: 'conflicting-values', about: placeOf(board, one.from, many.to).text });
+  const [from, to] = [Math.min(one.from, many.from), Math.max(one.to, many.to)];
+  board.problems.push({ code: 'conflicting-values', about: placeOf(board, from, to).text });
   drop(board, ['vessel', 'vessels']);
 }
 

@@ -395,7 +395,7 @@ export const en: Words = {
     'cue:quality': ['quality sparkling', 'quality sparkling wine'],
     'cue:other-sparkling': ['other sparkling', 'other sparkling wine', 'plain sparkling', 'ordinary sparkling'],
     'cue:pdo': ['pdo', 'pdo wine', 'national pdo'],
-    'cue:bulk': ['bulk wine', 'bulk export', 'in bulk', 'bulk for export', 'for bulk export'],
+    'cue:bulk': ['bulk', 'bulk wine', 'bulk export', 'in bulk', 'bulk for export', 'for bulk export'],
     'cue:keep': ['keep', 'keep back', 'hold back', 'set aside', 'reserve', 'save', 'leave', 'leave room for', 'keep room for'],
     'cue:bottling': ['bottling', 'to bottle', 'before bottling', 'pre bottling', 'prebottling', 'bottling day'],
     'cue:oxygen': ['oxygen', 'o2', 'dissolved oxygen', 'diss oxygen', 'dissolved o2', 'd o', 'tpo', 'total package oxygen', 'total oxygen', 'headspace oxygen'],
@@ -594,7 +594,7 @@ export const en: Words = {
     'lab-sample': ['sample', 'samples', 'wine sample', 'aliquot', 'pipette', 'pipetted'],
     'lab-titrant': ['titrant', 'burette', 'buret', 'used', 'consumed', 'titre', 'titer'],
     'lab-blank': ['blank'],
-    'lab-ascorbic': ['ascorbic', 'ascorbic acid', 'vitamin c'],
+    'lab-ascorbic': ['ascorbic', 'ascorbic acid', 'vitamin c', 'vit c', 'vit. c'],
     'lab-normal': ['n', 'normal', 'normality'],
     'lab-range': [
       'range', 'how sure', 'how sure are you', 'how sure is it', 'how sure is that', 'how sure is the dose', 'how accurate', 'how accurate is that', 'how exact is that',
@@ -637,7 +637,7 @@ export const en: Words = {
     'before-yesterday': ['day before yesterday', 'the day before yesterday', 'two days ago'],
     'part-of-day': ['morning', 'afternoon', 'evening', 'night'],
     yield: ['yield', 'press yield', 'yields', 'yield of', 'yield is', 'a yield of', 'expected yield'],
-    sheet: ['sheet', 'day sheet', 'log', 'day log', 'additions', 'entries', 'journal'],
+    sheet: ['sheet', 'day sheet', 'daily sheet', 'sheet of the day', 'sheet for the day', 'log', 'day log', 'additions', 'entries', 'journal'],
     tomorrow: ['tomorrow', 'until tomorrow', 'till tomorrow'],
     'next-week': ['next week', 'until next week', 'till next week', 'for a week'],
     'what-was-added': [
