@@ -93,7 +93,8 @@ const isDoneVessel = ({ board, said, isOfVessel, isQuestion }: Talk): boolean =>
   isOfVessel &&
   !isQuestion &&
   said.length === 1 &&
-  said[0]?.text === 'done' &&
+  said[0]?.ids.includes('done') === true &&
+  !said[0].text.includes(' ') &&
   said[0].from < (board.findings[0]?.from ?? 0);
 
 /** Reads what takes nothing but a vessel: `T4?`, `vessels`, `undo`, `what is due`, `not T4`. */
