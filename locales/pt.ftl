@@ -379,8 +379,8 @@ bottling-each =
         [formula] 4 por 1, pela fórmula
        *[other] { $each } por 1, como dizes
     }
-bottling-measured = Medido em números do setor (por confirmar) são { $each } por 1: então chegavam { bare-amount }. Para contar assim: oxigénio { $oxygen } mg/L a { $each }
-bottling-measured-none = Medido em números do setor (por confirmar) são { $each } por 1: então não é preciso nada. Para contar assim: oxigénio { $oxygen } mg/L a { $each }
+bottling-measured = Medido em números do setor (por confirmar) são { $each } por 1: então chegavam { bare-amount }. Para contar assim: oxigénio { $oxygen } mg/L x { $each }
+bottling-measured-none = Medido em números do setor (por confirmar) são { $each } por 1: então não é preciso nada. Para contar assim: oxigénio { $oxygen } mg/L x { $each }
 condition-stage = Só se a malolática estiver feita ou não for para fazer.
 condition-red =
     { $kind ->
@@ -870,7 +870,7 @@ help-must-6 = rendimento 65 → põe o rendimento habitual, litros de 100 kg
 help-must-7 = A maior parte combina-se: não protege mais tarde, e cerca de um terço volta como SO2 total.
 help-bottling-1 = O que tem de lá estar agora, para o objetivo se manter depois de o oxigénio levar a parte dele.
 help-bottling-2 = engarrafamento T4 40 hl pH 3,4 livre 22 oxigénio 2 mg/L → 4 de SO2 por 1 de oxigénio, pela fórmula
-help-bottling-3 = engarrafamento T4 40 hl pH 3,4 livre 22 oxigénio 2 mg/L a 2,5 → com um número teu
+help-bottling-3 = engarrafamento T4 40 hl pH 3,4 livre 22 oxigénio 2 mg/L x 2,5 → com um número teu
 help-bottling-4 = T4 40 hl pH 3,4 livre 22 total 90 guardar 20 para engarrafamento → folga até ao limite que se guarda
 help-bottling-5 = T4 em malolática pH 3,4 livre 25 total 60 → se a malolática pode arrancar; também amuada: um rearranque
 help-bottling-6 = Oxigénio: dissolvido e do espaço de cabeça juntos, em mg/L de vinho.
@@ -921,7 +921,7 @@ help-vessels-4 = T4 tinto → também em malolática, acabado
 help-vessels-5 = T4 tem agora 5200 L → o que está dentro; capacidade T4 6000 L: o tamanho
 help-vessels-6 = trasfegada T4 6100 L → também atestada T4
 help-vessels-7 = passado T4 para T9 → o vinho todo, ou 20 hl dele
-help-vessels-8 = loteado T5 com T4 → o pH tem de ser medido outra vez
+help-vessels-8 = loteado T5 em T4 → o pH tem de ser medido outra vez
 help-vessels-9 = T4 = Alva 2026 → o nome do vinho
 help-vessels-10 = T4 vazia → também: esquecer T4
 help-reminders-1 = Digo uma vez por dia o que há a medir, e depois de uma adição quando.
@@ -1420,6 +1420,10 @@ landed =
         [none] { "" }
        *[other] , previsto { $planned }
     }: de { $added } { $unit } combinou-se { $percent } %.
+landed-loose = { $vessel } ficou em { $after }{ $planned ->
+        [none] { "" }
+       *[other] , previsto { $planned }
+    }. Não se diz quanto se combinou: o livre de antes dos { $added } { $unit } foi lido em { $day }.
 landed-fell = { $vessel } foi de { $before } para { $after } apesar de terem entrado { $added } { $unit }: combinou-se tudo, ou há engano. Mede outra vez.
 landed-too-high = { $vessel } subiu { $rise } e só entraram { $added } { $unit }. Um número está mal: mede outra vez.
 on-it =
@@ -2184,6 +2188,10 @@ titration-asks = { $missing ->
     }
 }
 titration-either = { $strength } N dá { $normal } { $unit }, { $strength } M dá { $molar } { $unit }.
+button-keep-of = Guardar { $vessel }{ $of ->
+    [total] {" "}total
+   *[free] {""}
+}
 button-keep-result = Guardar
 
 # O laboratório: quanto pode errar uma dose, tabelas, as duas bases
@@ -2199,6 +2207,8 @@ range-dose = { $vessel ->
     }, ou seja { $low }–{ $high } { $unit } de SO2
 }.
 range-sure = Depois da dose tens garantidos { $molecular } { $unit } molecular, se se combinar o que contei.
+range-sure-unbound = Se nada se combinar tens garantidos { $molecular } { $unit } molecular depois da dose.
+range-sure-low = Abaixo de 10 { $unit } de livre pode combinar-se uma dose inteira: garantidos são só { $molecular } { $unit } molecular. Mede ao fim de um dia.
 range-rests = Assenta em pH ± { $ph } e livre ± { $free } { $unit }{ $said ->
     [both] .
     [one] {" "}(o que não disseste: prática comum, sem fonte).
