@@ -634,8 +634,8 @@ ask-ph = { at }che pH? Per esempio: 3,58
 ask-free_mg_L = { at }quanta SO2 libera, in { $unit }? Per esempio: 21
 ask-target =
     { $usual ->
-        [none] { at }a quanto vuoi arrivare? Un vino così non ha un obiettivo solito. Per esempio: a 30 di libera, 0,6 mol, aggiungere 25 ppm
-       *[some] { at }a quanto vuoi arrivare? Per esempio: a 30 di libera, 0,6 mol, aggiungere 25 ppm
+        [none] { at }a quanto vuoi arrivare? Un vino così non ha un obiettivo solito. Per esempio: obiettivo 30, 0,6 mol, aggiungere 25 ppm
+       *[some] { at }a quanto vuoi arrivare? Per esempio: obiettivo 30, 0,6 mol, aggiungere 25 ppm
     }
 ask-target-stage =
     { $stage ->
@@ -678,7 +678,7 @@ problem-ambiguous-number =
         [volume] { at }“{ $about }” può sbagliare di mille volte. Scrivi: { $one }, oppure: { $two }
         [mass] { at }“{ $about }” può sbagliare di mille volte. Scrivi: { $one }, oppure: { $two }
         [thousands] { at }“{ $about }” può sbagliare di mille volte. Scrivi: { $one }, oppure: { $two }
-        [powder] { at }“{ $about }”: di SO2 o di polvere? Scrivi: aggiungere { $one } ppm SO2, oppure: { $two } g per 10 L { $named }
+        [powder] { at }“{ $about }”: di SO2 o di polvere? Scrivi: aggiungere { $one } ppm SO2, oppure: { $two } g ogni 10 L { $named }
         [salt] { at }“{ $about }”: di SO2 o di sale? Come SO2 è più forte di quanto si venda. Se in etichetta c’è sale, scrivi: { salt-name } sale { $one }%
         [water] { at }“{ $about }”: SO2 in acqua o soluzione di metabisolfito? Scrivi: acqua solforosa { $one }%, oppure: soluzione di meta { $one }%
         [SO2-percent] { at }“{ $about }”: alcol, SO2 in acqua o soluzione di metabisolfito? Scrivi: { $one }% vol, acqua solforosa { $one }%, oppure: soluzione di meta { $one }%
@@ -933,7 +933,7 @@ help-reminders-5 = non seguire T4 → non ne parlo più; segui T4: di nuovo
 help-reminders-6 = silenzio dalle 21 alle 6 → di notte niente se non chiedi
 help-settings-1 = Tutto questo vale per l’intera cantina.
 help-settings-2 = impostazioni → cosa è impostato, e come cambiarlo
-help-settings-3 = unità us → anche metriche, imperiali
+help-settings-3 = unità americane → anche metriche, imperiali
 help-settings-4 = di solito usiamo metabisolfito di sodio → il prodotto quando non lo dici
 help-settings-5 = obiettivo 0,5 per i rossi → anche bianchi, dolci
 help-settings-6 = margine 30% → aggiunto a ogni dose, per quello che si combina
@@ -1406,6 +1406,11 @@ landed =
         [none] { "" }
        *[other] , previsti { $planned }
     }: di { $added } { $unit } si è combinato { $percent } %.
+landed-loose =
+    { $vessel } è arrivata a { $after }{ $planned ->
+        [none] { "" }
+       *[other] , previsti { $planned }
+    }. Quanto si è combinato non si sa: la libera prima dei { $added } { $unit } è di un altro giorno ({ $day }).
 landed-fell = { $vessel } è passata da { $before } a { $after } con { $added } { $unit } aggiunti: tutto combinato, o un errore. Rimisura.
 landed-too-high = { $vessel } è salita di { $rise } con solo { $added } { $unit } aggiunti. Una cifra è sbagliata: rimisura.
 on-it =
@@ -2109,7 +2114,7 @@ stock-lacks =
     { $what ->
         [additive] Quale prodotto? Scrivi: ricevuti 25 kg di meta
         [strength] Che titolo ha: { additive }? Scrivi: ricevuti 10 L di SO2 al 6%
-        [size] Pastiglie da quanti grammi? Scrivi: ricevute 50 pastiglie da 5 g
+        [size] Pastiglie da quanti grammi? Scrivi: ricevute 50 pastiglie 5 g
         [volume] Le aggiunte di { additive } si misurano a volume. Scrivi: ricevuti 10 L di SO2 al 6%
         [one] Un prodotto per messaggio. Scrivi: ricevuti 25 kg di meta
        *[amount] Quanto { additive }, e in che unità? Scrivi: { $event ->
@@ -2171,6 +2176,10 @@ titration-asks = { $missing ->
 }
 titration-either = { $strength } N dà { $normal } { $unit }, { $strength } M dà { $molar } { $unit }.
 button-keep-result = Annota
+button-keep-of = Annota { $vessel }{ $of ->
+    [total] {" "}totale
+   *[free] {""}
+}
 
 # Il laboratorio: di quanto può sbagliare una dose, tabelle, le due basi
 
@@ -2185,6 +2194,8 @@ range-dose = { $vessel ->
     }, cioè { $low }–{ $high } { $unit } di SO2
 }.
 range-sure = Dopo la dose sei sicuro di { $molecular } { $unit } di molecolare, se si combina quanto calcolato.
+range-sure-unbound = Se non si combina niente, dopo la dose sei sicuro di { $molecular } { $unit } di molecolare.
+range-sure-low = Sotto 10 { $unit } di libera una dose può combinarsi tutta: sicuri sono solo { $molecular } { $unit } di molecolare. Misura dopo un giorno.
 range-rests = Con pH ± { $ph } e libera ± { $free } { $unit }{ $said ->
     [both] .
     [one] {" "}(quello che non hai detto: pratica comune, senza fonte).
