@@ -378,9 +378,9 @@ bottling-each =
         [formula] 4 por 1, por fórmula
        *[other] { $each } por 1, como dices
     }
-bottling-measured = En cifras del sector (sin confirmar) se mide { $each } por 1: bastaría { bare-amount }. Para calcular así: oxígeno { $oxygen } mg/L x { $each }
-bottling-measured-none = En cifras del sector (sin confirmar) se mide { $each } por 1: no haría falta nada. Para calcular así: oxígeno { $oxygen } mg/L x { $each }
-condition-stage = Solo si la maloláctica está hecha o no se quiere.
+bottling-measured = Cifras del sector (sin confirmar) dan { $each } por 1: bastaría { bare-amount }. Para contar así: oxígeno { $oxygen } mg/L x { $each }
+bottling-measured-none = Cifras del sector (sin confirmar) dan { $each } por 1: no haría falta nada. Para contar así: oxígeno { $oxygen } mg/L x { $each }
+condition-stage = Solo con la maloláctica hecha o no querida.
 condition-red =
     { $kind ->
         [none] Si es tinto ({ $red } molecular): nada que añadir.
@@ -410,12 +410,12 @@ stage-word =
 
 ## Lo que hace
 
-effect-land = { $after } { $unit } de libre si no se combina nada; cuenta con { $range }, pues suele combinarse de un tercio a la mitad; mide mañana.
-effect-land-molecular = De { $molecularNow } a { $molecular } molecular: { $after } { $unit } de libre si no se combina nada; cuenta con { $range }, pues suele combinarse de un tercio a la mitad; mide mañana.
-effect-land-to-molecular = A { $molecular } molecular: { $after } { $unit } de libre si no se combina nada; cuenta con { $range }, pues suele combinarse de un tercio a la mitad; mide mañana.
-effect-land-low = { $after } { $unit } de libre si no se combina nada; por debajo de 10 de libre puede combinarse mucho o todo: cuenta con { $range }, mide antes de añadir otra vez.
+effect-land = { $after } { $unit } de libre si nada se combina; cuenta con { $range } (suele combinarse de 1/3 a 1/2); mide mañana.
+effect-land-molecular = De { $molecularNow } a { $molecular } molecular: { $after } { $unit } de libre si nada se combina; cuenta con { $range } (suele combinarse de 1/3 a 1/2); mide mañana.
+effect-land-to-molecular = A { $molecular } molecular: { $after } { $unit } de libre si nada se combina; cuenta con { $range } (suele combinarse de 1/3 a 1/2); mide mañana.
+effect-land-low = { $after } { $unit } de libre si nada se combina; por debajo de 10 de libre puede combinarse mucho o todo: cuenta con { $range }, mide antes de añadir otra vez.
 effect-land-small = { $after } { $unit } de libre como mucho: sube menos que el error de una medida.
-effect-rise = El libre sube unos { $range } { $unit }, pues suele combinarse de un tercio a la mitad; mide mañana.
+effect-rise = El libre sube unos { $range } { $unit } (suele combinarse de 1/3 a 1/2); mide mañana.
 effect-must = La mayor parte se combina mientras fermenta el mosto: luego no protege el vino.
 must-comes-back = Un tercio más o menos vuelve como SO2 total: + { $total } { $unit } (texto técnico alemán, 2012).
 must-yeast = Levadura de { $least } a { $most } horas después (práctica común, sin fuente).
@@ -439,7 +439,7 @@ must-colour =
     }
 must-say-state = ¿Cómo viene la uva? Di uva sana, algo dañada o con podredumbre, y habrá una cifra que elegir.
 button-published = Añadir { $add }
-effect-raise = + { $dose } { $unit } si no se combina nada; suele combinarse de un tercio a la mitad; mide mañana.
+effect-raise = + { $dose } { $unit } si nada se combina; suele combinarse de 1/3 a 1/2; mide mañana.
 third-needs =
     { $third ->
         [more] ; si se combina un tercio hace falta la mitad más
@@ -459,7 +459,7 @@ nothing-why-free = { $free } de libre; el objetivo es { target }.
 adds =
     { $number ->
         [many] { at }{ $list } añaden { $adds } de SO2
-       *[one] { at }{ $list } añade { $adds } de SO2
+       *[one] { at }{ $list } añaden { $adds } de SO2
     }
 adds-rate = { at }“{ $rate }” ({ $ofAdditive } de { additive }) añade { $adds } de SO2
 amount = { $amount } de { additive }
@@ -584,7 +584,7 @@ fact-strength =
         [SO2-per-100mL] { additive }, { $strength } % = { $strength } g de SO2 en 100 mL
        *[noted] { additive }, { $strength } %
     }
-assumed-additive = { additive }, puro
+assumed-additive = { additive } puro
 assumed-target = objetivo { target }
 assumed-target-red = objetivo { target } (tinto)
 assumed-target-sweet = objetivo { target } (dulce)
@@ -762,7 +762,7 @@ warning-total-over-limit =
         [known] ⚠ El total quedaría en { $total_after_mg_L }, sobre { $limit_mg_L } { $unit } ({ rule-short }{ limit-doubt }){ law-decides }: pregunta antes.
        *[at-least] ⚠ El total quedaría al menos en { $total_after_mg_L }, sobre { $limit_mg_L } { $unit } ({ rule-short }{ limit-doubt }){ law-decides }: pregunta antes.
     }
-warning-free-over-limit = ⚠ El libre podría llegar a { $free_after_mg_L } si no se combina nada, sobre el límite de libre { $limit_mg_L } { $unit } ({ rule-short }{ limit-doubt }){ law-decides }: pregunta antes.
+warning-free-over-limit = ⚠ El libre podría llegar a { $free_after_mg_L } si nada se combina, sobre el límite de libre { $limit_mg_L } { $unit } ({ rule-short }{ limit-doubt }){ law-decides }: pregunta antes.
 warning-label-threshold =
     ⚠ Etiqueta ({ law-of }): los sulfitos se nombran { $comparator ->
         [more] por encima de
@@ -818,16 +818,16 @@ cautions = ⚠ { $list }
 caution-trained-people-with-breathing-apparatus = Solo personal formado, con equipo de respiración a mano.
 caution-grapes-and-must-only = Solo para uva y mosto.
 caution-ventilate = Ventila.
-caution-never-lean-in = Nunca te asomes a un depósito.
-caution-gloves-goggles = Guantes y gafas.
-caution-no-acid-no-chlorine = Nunca con ácidos ni lejía.
-caution-no-other-acid-no-chlorine = Ningún otro ácido, nada de lejía.
-caution-asthma = No para asmáticos.
-caution-crush-first = Machaca y disuelve en un poco de vino o agua.
-caution-dissolve-first = Disuelve antes en un poco de vino o agua.
-caution-foams-with-carbon-dioxide = Un vino lleno de CO2 rebosa espuma.
-caution-mix-and-measure-again = Remueve, mide al día siguiente.
-caution-label-and-rules-first = Antes: la etiqueta, las normas locales y alguien cualificado.
+caution-never-lean-in = No te asomes al depósito.
+caution-gloves-goggles = Guantes, gafas.
+caution-no-acid-no-chlorine = Nunca con ácido ni lejía.
+caution-no-other-acid-no-chlorine = Ni otro ácido ni lejía.
+caution-asthma = Asmáticos, no.
+caution-crush-first = Machaca y disuelve en algo de vino o agua.
+caution-dissolve-first = Disuelve antes en algo de vino o agua.
+caution-foams-with-carbon-dioxide = Vino con mucho CO2: rebosa.
+caution-mix-and-measure-again = Remueve, mide al otro día.
+caution-label-and-rules-first = Antes: etiqueta, normas locales, alguien cualificado.
 cautions-of = ⚠ { additive }: { $list }
 cautions-short = ⚠ Precauciones como antes: botón Seguridad.
 
@@ -1050,7 +1050,7 @@ step-so2-in-amount = SO2 que lleva, cantidad × SO2 de una unidad:
 step-added-concentration = Añadido, SO2 × 1000 ÷ volumen:
 step-added-by-rate = Añadido, proporción × parte de SO2:
 step-mass-by-rate = Aditivo, proporción × volumen ÷ 1000:
-step-free-after = Libre después, si no se combina nada:
+step-free-after = Libre después, si nada se combina:
 step-molecular-after = Molecular después, libre ÷ (10^(pH − pK) + 1):
 step-salt-mass = Sal, gramos en 0,1 L ÷ 0,1 L × volumen:
 step-added-by-one-millilitre = Un mL en una barrica, SO2 que lleva ÷ volumen de la barrica:
@@ -1151,18 +1151,18 @@ round-strength =
        *[other] , { $size } %
     }
 round-for-all = Para todos: { $list }.
-round-kept = Las lecturas quedan guardadas.
+round-kept = Lecturas guardadas.
 round-red = “Si es tinto” es para { $red } molecular.
 round-stock = Como solución suya al { $strength } %: { $list }.
 round-rest = El resto como solución al { $strength } %: { $list }.
 round-stock-of = { $vessel } { $amount }
-mixed-sample = Eso es para la media de las { $count }: una muestra mezclada no enseña la más baja. No hay dato de cuánto difieren; una que esté 5 por debajo queda 5 por debajo. Mide algunas sueltas antes de dosificar todas (práctica común, sin fuente).
+mixed-sample = Eso es para la media de las { $count }: una muestra mezclada no enseña la más baja, y cuánto difieren no consta; una con 5 menos queda 5 por debajo. Mide algunas sueltas antes de dosificar (práctica común, sin fuente).
 round-mixed = ⚠ Una muestra mezclada da la media y no la más baja: { $list }. Mide algunas sueltas.
 round-low = ⚠ Por debajo de 10 de libre puede combinarse mucho o todo: { $list }. Ahí mide antes de añadir otra vez.
 round-name = { $name }
-round-again = Envía otra vez, entera, cada línea que no se pudo leer.
+round-again = Reenvía entera cada línea que no se pudo leer.
 round-total =
-    En total { $list }: la suma de las { $count } cantidades redondeadas.
+    En total { $list }: suma de las { $count } cantidades redondeadas.
 round-total-of =
     { $kind ->
         [tablet] { $amount } pastillas efervescentes de { $size } g de SO2
@@ -1221,7 +1221,7 @@ sheet-measure = Medir mL
 sheet-tablets = Pastillas
 sheet-additive = Aditivo
 sheet-strength = Concentración %
-sheet-after = Libre después, si no se combina nada mg/L
+sheet-after = Libre después, si nada se combina mg/L
 sheet-note = Nota
 sheet-done = Hecho
 sheet-in-all = En total
@@ -1245,8 +1245,8 @@ round-not-understood =
         [none] Una línea no la he podido leer.
        *[other] “{ $about }” no lo he podido leer.
     }
-round-effect-short = Suele combinarse de un tercio a la mitad: mide mañana.
-round-effect = De una adición suele combinarse de un tercio a la mitad: mide mañana. Para ver el cálculo de uno envía su línea sola.
+round-effect-short = Suele combinarse de 1/3 a 1/2: mide mañana.
+round-effect = Suele combinarse de 1/3 a 1/2: mide mañana. Para ver un cálculo envía su línea sola.
 choice-additive = { $value ->
         [potassium-metabisulfite] Metabisulfito potásico
         [sodium-metabisulfite] Metabisulfito sódico
@@ -1404,6 +1404,10 @@ landed =
         [none] { "" }
        *[other] , previsto { $planned }
     }: de { $added } { $unit } se combinó un { $percent } %.
+landed-loose = { $vessel } quedó en { $after }{ $planned ->
+        [none] { "" }
+       *[other] , previsto { $planned }
+    }. No se dice cuánto se combinó: el libre de antes de los { $added } { $unit } se leyó el { $day }.
 landed-fell = { $vessel } pasó de { $before } a { $after } aunque se añadieron { $added } { $unit }: todo combinado, o un despiste. Mide otra vez.
 landed-too-high = { $vessel } subió { $rise } aunque solo se añadieron { $added } { $unit }. Una cifra no cuadra: mide otra vez.
 on-it =
@@ -1483,10 +1487,10 @@ entry-vessel =
 entry-other = { $vessel } { $text } (sin calcular)
 entry-stock =
     { $event ->
-        [received] recibido:
+        [received] recibido
         [used] usado, para ningún vino:
-        [discarded] tirado:
-       *[counted] contado:
+        [discarded] tirado
+       *[counted] contado
     } { $list }{ $supplier ->
         [none] { "" }
        *[other] { " " }de { $supplier }
@@ -1770,6 +1774,7 @@ at-others = Otras: { $list }. Para cambiar: estamos en, y el nombre
 at-only = Aquí no hay otra.
 at-unknown = Aquí no conozco ninguna bodega “{ $text }”. Están: { $list }.
 at-which = ¿Qué “{ $text }”? { $list }.
+cellar-left = Ya no estás en { $list }. Lo que anotaste se queda en su registro.
 cellar-named = Esta bodega es ahora { $name }.
 reads-along =
     { $on ->
@@ -2086,10 +2091,10 @@ stock-oldest-lot =
 stock-lot-unknown = El lote { $lot } no está en el almacén según el registro: tomado del más viejo.
 stock-noted =
     Anotado { $entry }: { $event ->
-        [received] recibido:
-        [used] usado:
-        [discarded] tirado:
-       *[counted] contado:
+        [received] recibido
+        [used] usado
+        [discarded] tirado
+       *[counted] contado
     } { $list }{ $supplier ->
         [none] { "" }
        *[other] { " " }de { $supplier }
@@ -2168,6 +2173,10 @@ titration-asks = { $missing ->
     }
 }
 titration-either = { $strength } N da { $normal } { $unit }, { $strength } M da { $molar } { $unit }.
+button-keep-of = Guardar { $vessel }{ $of ->
+    [total] {" "}total
+   *[free] {""}
+}
 button-keep-result = Guardarlo
 
 # El laboratorio: cuánto puede errar una dosis, tablas, las dos bases
@@ -2183,6 +2192,8 @@ range-dose = { $vessel ->
     }, o sea { $low }–{ $high } { $unit } de SO2
 }.
 range-sure = Tras la dosis puedes contar seguro con { $molecular } { $unit } de molecular, si se combina lo calculado.
+range-sure-unbound = Si nada se combina puedes contar seguro con { $molecular } { $unit } de molecular tras la dosis.
+range-sure-low = Por debajo de 10 { $unit } de libre puede combinarse toda una dosis: seguros son solo { $molecular } { $unit } de molecular. Mide al día siguiente.
 range-rests = Se apoya en pH ± { $ph } y libre ± { $free } { $unit }{ $said ->
     [both] .
     [one] {" "}(lo que no dijiste: práctica común, sin fuente).

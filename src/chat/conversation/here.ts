@@ -2,6 +2,7 @@ import type { CellarView, Person } from '../../core/cellar/cellar-store.ts';
 import type { Shelf } from '../../core/cellar/shelf.ts';
 import type { Vessel } from '../../core/cellar/vessel.ts';
 import type { Language } from '../reader/understood.ts';
+import { usualDecimalMark } from '../reader/usual-decimal-mark.ts';
 import {
   chatLanguageKey,
   claimKey,
@@ -90,6 +91,10 @@ export async function arrive(message: IncomingMessage, view: CellarView, default
   ]);
   const { language, ...languages } = languagesOf(message, all);
   const kept = all.get(memoryKey(message));
+  const memory = kept === undefined ? FRESH_MEMORY : (JSON.parse(kept) as Memory);
+  // Who begins in another language writes its decimals as they are written there.
+  const shown = languages.changedFrom === undefined ? memory.decimalMark : undefined;
+  const decimalMark = shown ?? usualDecimalMark(language);
   const daily = all.get(dailyKey(message.chat));
   const noted = all.get(notedKey(message));
   const set = all.get(SETTINGS_KEY);
@@ -99,7 +104,7 @@ export async function arrive(message: IncomingMessage, view: CellarView, default
   return {
     ...NO_FACTS,
     message,
-    memory: kept === undefined ? FRESH_MEMORY : (JSON.parse(kept) as Memory),
+    memory: { ...memory, decimalMark },
     settings: { ...mergeSettings(defaults, set), language },
     ...languages,
     me,
