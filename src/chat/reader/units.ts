@@ -35,6 +35,7 @@ const isPer = (board: Board, i: number): boolean => isMark(board, i, '/') || has
 export function concentrationAt(board: Board, i: number): UnitAt | undefined {
   if (hasTag(board, i, 'unit:ppm')) return { id: 'ppm', to: i };
   if (hasTag(board, i, 'unit:mg/L')) return { id: 'mg/L', to: i };
+  if (hasTag(board, i, 'unit:g/hL')) return { id: 'g/hL', to: i };
   const mass = unitWordAt(board, i, ['mg', 'g']);
   if (mass === undefined) return undefined;
   const volume = isPer(board, i + 1) ? unitWordAt(board, i + 2, ['L', 'hL']) : undefined;
