@@ -379,8 +379,8 @@ bottling-each =
         [formula] 4 zu 1, nach Formel
        *[other] { $each } zu 1, wie du sagst
     }
-bottling-measured = In Zahlen aus der Praxis (nicht bestätigt) ist es { $each } zu 1: dann reichen { bare-amount }. So rechnen: Sauerstoff { $oxygen } mg/l zu { $each }
-bottling-measured-none = In Zahlen aus der Praxis (nicht bestätigt) ist es { $each } zu 1: dann fehlt nichts. So rechnen: Sauerstoff { $oxygen } mg/l zu { $each }
+bottling-measured = In Zahlen aus der Praxis (nicht bestätigt) ist es { $each } zu 1: dann reichen { bare-amount }. So rechnen: Sauerstoff { $oxygen } mg/l mal { $each }
+bottling-measured-none = In Zahlen aus der Praxis (nicht bestätigt) ist es { $each } zu 1: dann fehlt nichts. So rechnen: Sauerstoff { $oxygen } mg/l mal { $each }
 condition-stage = Nur wenn der BSA fertig oder nicht gewollt ist.
 condition-red =
     { $kind ->
@@ -870,7 +870,7 @@ help-must-6 = Ausbeute 65 → die übliche Ausbeute, Liter aus 100 kg
 help-must-7 = Das meiste bindet: es schützt später nicht, und etwa ein Drittel ist als gesamte SO2 wieder da.
 help-bottling-1 = Was jetzt da sein muss, damit das Ziel hält, wenn der Sauerstoff sein Teil genommen hat.
 help-bottling-2 = Füllung T4 40 hl pH 3,4 frei 22 Sauerstoff 2 mg/l → 4 SO2 auf 1 Sauerstoff, nach Formel
-help-bottling-3 = Füllung T4 40 hl pH 3,4 frei 22 Sauerstoff 2 mg/l zu 2,5 → mit eigener Zahl
+help-bottling-3 = Füllung T4 40 hl pH 3,4 frei 22 Sauerstoff 2 mg/l mal 2,5 → mit eigener Zahl
 help-bottling-4 = T4 40 hl pH 3,4 frei 22 gesamt 90 Reserve 20 für die Füllung → Platz unter dem Grenzwert
 help-bottling-5 = T4 im BSA pH 3,4 frei 25 gesamt 60 → ob der BSA startet; auch Gärstockung: ein Neustart
 help-bottling-6 = Sauerstoff: gelöst und im Kopfraum zusammen, in mg/L Wein.
@@ -886,7 +886,7 @@ help-law-2 = Recht EU → auch US, UK, OIV, CH, CA, JP …; für den ganzen Kell
 help-law-3 = Grenzwert T4 → Regel, Text, wie geprüft, Platz darunter
 help-law-4 = Grenzwert rot RZ 3 EU → ohne Gebinde
 help-law-5 = T4 rot → Farbe und Zucker (RZ 3 beim Messwert) entscheiden; Unbekanntes zählt am strengsten
-help-law-6 = T4 bio → auch Qualitätsschaumwein, g.U., Fasswein, Dichte 0,992
+help-law-6 = T4 bio → auch Qualitätsschaumwein, gU, Fasswein, Dichte 0,992
 help-law-7 = T4 Sondergrenze 300 → ein Süßwein mit eigenem Grenzwert; auch T4 Ausnahmejahr
 help-law-8 = T4 Reserve 30 für die Füllung → bleibt unter dem Grenzwert frei, dazu 15 für den Messfehler
 help-law-9 = Darüber kommt erst die kleinere Dosis: volle Dosis, dann ja. Das Kellerbuch hält es fest.
@@ -949,7 +949,7 @@ help-people-2 = Leute → wer dabei ist
 help-people-3 = einladen Mitarbeiter → ein Code für eine Person; auch Kellermeister, Gast
 help-people-4 = Kellermeister dürfen alles, Mitarbeiter dosieren und tragen ein, Gäste schauen.
 help-people-5 = lies mit → ich antworte auf klare Werte auch ungerufen
-help-people-6 = Keller → in welchem Keller wir sind; Keller Blanca: ein anderer
+help-people-6 = meine Keller → in welchem wir sind; bei Blanca: ein anderer
 help-people-7 = vergiss mich → dein Name und deine Nummer kommen weg
 help-lab-1 = Eine Titration wird mit Rechenweg gerechnet; behalten wird erst, was du antippst.
 help-lab-2 = AO 20 mL Probe, 1,9 mL 0,01 N → freie SO2; mit T4 davor auf einen Tipp behalten
@@ -1767,7 +1767,7 @@ at-cellar = { $list }:
 at-now = Jetzt: { $list }.
 at-already = Wir sind schon hier: { $list }.
 at-here = Wir sind hier: { $list }.
-at-others = Andere: { $list }. Wechseln: Keller und der Name
+at-others = Andere: { $list }. Wechseln: bei und der Name
 at-only = Einen anderen gibt es hier nicht.
 at-unknown = Einen Keller „{ $text }“ kenne ich hier nicht. Es gibt: { $list }.
 at-which = Welcher „{ $text }“? { $list }.

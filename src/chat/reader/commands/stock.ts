@@ -46,6 +46,13 @@ function supplierIn(board: Board): Stretch | undefined {
   return opener && stretchBehind(board, opener);
 }
 
+/** A verb that closes the message is no part of the name before it. */
+function supplierBeside(board: Board, opener: Piece): Stretch | undefined {
+  const at = board.pieces.indexOf(opener);
+  const [before, after] = [board.pieces.slice(0, at), board.pieces.slice(at + 1)];
+  return supplierIn({ ...board, pieces: before }) ?? supplierIn({ ...board, pieces: after });
+}
+
 /** `for rinsing`, `to clean the hoses`: what is no wine. */
 function purposeIn(board: Board): Stretch | undefined {
   const { pieces } = board;
@@ -153,6 +160,14 @@ function askedFor(talk: Talk): Draft | undefined {
   return { ...draftOfBoard(own, 'command'), command: { name: 'stock' } };
 }
 
+const openerOf = ({ ids }: Piece) => OPENING.find((id) => ids.includes(id));
+
+/** `25 kg KDS erhalten`: elsewhere than in English the verb may close what it tells. */
+const closingIn = ({ board, said }: Talk): Piece | undefined =>
+  board.lexicon.language === 'en'
+    ? undefined
+    : said.find(({ ids }) => ids.includes('received') || ids.includes('discarded'));
+
 /**
  * Reads what comes into the chemical store, goes out of it otherwise than into wine, and what is counted on the shelf:
  * `received 25 kg kmbs lot 4471 from Norte Supplies`, `used 200 g kmbs for rinsing`, `stock kmbs 3.2 kg`; and `stock`,
@@ -160,15 +175,16 @@ function askedFor(talk: Talk): Draft | undefined {
  */
 export function readStock(talk: Talk): Draft | undefined {
   const { board, said, isQuestion } = talk;
-  const first = said.find(
+  const leading = said.find(
     ({ ids }) => !ids.includes('filler') && !ids.includes('ask') && !ids.includes('show'),
   );
-  const opener = first && OPENING.find((id) => first.ids.includes(id));
+  const first = [leading, closingIn(talk)].find((one) => one && openerOf(one));
+  const opener = first && openerOf(first);
   if (first === undefined || opener === undefined) return askedFor(talk);
   const isStock = opener === 'stock';
   if (isStock ? isOfSolution(board, first) : isQuestion) return undefined;
   const [supplier, purpose, reason] = [
-    opener === 'received' ? supplierIn(board) : undefined,
+    opener === 'received' ? supplierBeside(board, first) : undefined,
     opener === 'used-up' ? purposeIn(board) : undefined,
     opener === 'discarded' ? reasonIn(board) : undefined,
   ];

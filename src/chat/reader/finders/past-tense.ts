@@ -12,6 +12,22 @@ function cueBetween(
   return false;
 }
 
+/** How far before its verb a negation may stand, in terms; one more of them is of something else. */
+const REACH = 5;
+
+/**
+ * `nicht 90 g KDS in Tank 4 gegeben`: where the verb closes its clause, all of the clause stands between. In English
+ * the verb comes early.
+ */
+function clauseFrom(board: Board, verb: number): number {
+  const next = board.terms[verb + 1];
+  const closes = next === undefined || next.kind === 'break' || next.kind === 'mark';
+  if (board.lexicon.language === 'en' || !closes) return verb - REACH;
+  let from = verb;
+  while (from > 0 && termAt(board, from - 1).kind !== 'break' && !isMark(board, from - 1, ',')) from--;
+  return Math.min(from, verb - REACH);
+}
+
 /** `no sulfites added`. */
 const saysNo = (board: Board, i: number): boolean => [i - 1, i - 2, i - 3].some((k) => isCue(board, k, 'no'));
 
@@ -46,7 +62,7 @@ export function isToldAsFact(board: Board, i: number): boolean {
     !asks &&
     !isMark(board, i + 1, '?') &&
     !isQuestion(board) &&
-    !cueBetween(board, i - 5, i, 'not') &&
+    !cueBetween(board, clauseFrom(board, i), i, 'not') &&
     !saysNo(board, i) &&
     !cueBetween(board, 0, i, 'if') &&
     !cueBetween(board, 0, i, 'not-yet') &&
@@ -67,6 +83,6 @@ export function findPastTense(board: Board): void {
   if (said < 0 && !declined && !board.pastTense) findUnclearVerb(board);
   if (said < 0 || declined) return;
   board.pastTense = isToldAsFact(board, said);
-  const negated = cueBetween(board, said - 5, said, 'not') || saysNo(board, said);
+  const negated = cueBetween(board, clauseFrom(board, said), said, 'not') || saysNo(board, said);
   if (negated) board.notes.push({ id: 'negated', text: '' });
 }
