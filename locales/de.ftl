@@ -1405,6 +1405,11 @@ landed =
         [none] { "" }
        *[other] , geplant { $planned }
     }: von { $added } { $unit } haben { $percent } % gebunden.
+landed-loose =
+    { $vessel } kam auf { $after }{ $planned ->
+        [none] { "" }
+       *[other] , geplant { $planned }
+    }. Wie viel gebunden hat, lässt sich nicht sagen: frei vor den { $added } { $unit } wurde am { $day } gemessen.
 landed-fell = { $vessel } ging von { $before } auf { $after }, obwohl { $added } { $unit } hineinkamen: alles gebunden oder vertan. Miss noch einmal.
 landed-too-high = { $vessel } stieg um { $rise }, obwohl nur { $added } { $unit } hineinkamen. Eine Zahl stimmt nicht: miss noch einmal.
 on-it =
@@ -1740,6 +1745,7 @@ joined-how =
         [guest] Frag nach einem Gebinde, zum Beispiel: T4?
        *[other] Schick Werte, zum Beispiel: T4 55 hl pH 3,58 frei 21
     }
+cellar-left = Du bist nicht mehr dabei: { $list }. Was du eingetragen hast, bleibt im Kellerbuch.
 join-unknown = Der Code stimmt nicht oder ist abgelaufen. Lass dir einen neuen geben.
 join-used = Der Code wurde schon benutzt. Lass dir einen neuen geben.
 people-head = Leute dieses Kellers:
@@ -2170,6 +2176,10 @@ titration-asks = { $missing ->
 }
 titration-either = { $strength } N ergibt { $normal } { $unit }, { $strength } M ergibt { $molar } { $unit }.
 button-keep-result = Eintragen
+button-keep-of = { $vessel }{ $of ->
+    [total] {" "}gesamt
+   *[free] {""}
+} eintragen
 
 # The laboratory: how far a dose may be off, tables, both bases
 
@@ -2184,6 +2194,8 @@ range-dose = { $vessel ->
     }, das sind { $low }–{ $high } { $unit } SO2
 }.
 range-sure = Nach der Dosis sind { $molecular } { $unit } molekular sicher, wenn so viel bindet wie gerechnet.
+range-sure-unbound = Bindet nichts, sind nach der Dosis { $molecular } { $unit } molekular sicher.
+range-sure-low = Unter 10 { $unit } frei kann eine Dosis ganz binden: sicher sind nur { $molecular } { $unit } molekular. Nach einem Tag messen.
 range-rests = Beruht auf pH ± { $ph } und frei ± { $free } { $unit }{ $said ->
     [both] .
     [one] {" "}(was du nicht gesagt hast: üblich, ohne Quelle).
