@@ -380,7 +380,7 @@ bottling-each =
     }
 bottling-measured = Cifras del sector (sin confirmar) dan { $each } por 1: bastaría { bare-amount }. Para contar así: oxígeno { $oxygen } mg/L x { $each }
 bottling-measured-none = Cifras del sector (sin confirmar) dan { $each } por 1: no haría falta nada. Para contar así: oxígeno { $oxygen } mg/L x { $each }
-condition-stage = Solo con la maloláctica hecha o no querida.
+condition-stage = Solo si la malo está hecha o no se quiere.
 condition-red =
     { $kind ->
         [none] Si es tinto ({ $red } molecular): nada que añadir.
@@ -428,9 +428,9 @@ must-published =
 must-none-published = Las cifras que tengo se publicaron para uva; para { fact-product } no hay ninguna.
 must-range =
     { $state ->
-        [sound] { must-colour }sana { $range }
-        [damaged] { must-colour }algo dañada { $range }
-       *[rot] { must-colour }con podredumbre { $range }
+        [sound] uva { must-colour }sana { $range }
+        [damaged] uva { must-colour }algo dañada { $range }
+       *[rot] uva { must-colour }con podredumbre { $range }
     } { $unit }
 must-colour =
     { $style ->
@@ -589,7 +589,7 @@ assumed-target = objetivo { target }
 assumed-target-red = objetivo { target } (tinto)
 assumed-target-sweet = objetivo { target } (dulce)
 assumed-gallon = { $gallon ->
-        [US] galones de EE. UU.
+        [US] galones (EE. UU.)
        *[imperial] galones imperiales
     }
 assumed-must = { $fruit } kg × { $yield } L/100 kg = { $volume }
@@ -673,9 +673,9 @@ problem-unit-mismatch = { at }la unidad no cuadra en “{ $about }”. El libre 
 problem-ambiguous-number =
     { $kind ->
         [split] { at }hay un espacio dentro de “{ $about }”. Escribe: pH { $one }
-        [volume] { at }“{ $about }” puede errar por mil. Escribe: { $one }, o: { $two }
-        [mass] { at }“{ $about }” puede errar por mil. Escribe: { $one }, o: { $two }
-        [thousands] { at }“{ $about }” puede errar por mil. Escribe: { $one }, o: { $two }
+        [volume] { at }“{ $about }”: ¿son miles o decimales? Escribe: { $one }, o: { $two }
+        [mass] { at }“{ $about }”: ¿son miles o decimales? Escribe: { $one }, o: { $two }
+        [thousands] { at }“{ $about }”: ¿son miles o decimales? Escribe: { $one }, o: { $two }
         [powder] { at }“{ $about }”: ¿de SO2 o del polvo? Escribe: añadir { $one } ppm SO2, o: { $two } g por 10 L de { $named }
         [salt] { at }“{ $about }”: ¿de SO2 o de la sal? Como SO2 es demasiado fuerte para venderse. Si la etiqueta dice sal, escribe: { salt-name } sal { $one }%
         [water] { at }“{ $about }”: ¿SO2 en agua o una solución de metabisulfito? Escribe: solución sulfurosa { $one }%, o: solución de meta al { $one }%
@@ -822,7 +822,7 @@ caution-never-lean-in = No te asomes al depósito.
 caution-gloves-goggles = Guantes, gafas.
 caution-no-acid-no-chlorine = Nunca con ácido ni lejía.
 caution-no-other-acid-no-chlorine = Ni otro ácido ni lejía.
-caution-asthma = Asmáticos, no.
+caution-asthma = No para asmáticos.
 caution-crush-first = Machaca y disuelve en algo de vino o agua.
 caution-dissolve-first = Disuelve antes en algo de vino o agua.
 caution-foams-with-carbon-dioxide = Vino con mucho CO2: rebosa.
@@ -1153,7 +1153,7 @@ round-strength =
 round-for-all = Para todos: { $list }.
 round-kept = Lecturas guardadas.
 round-red = “Si es tinto” es para { $red } molecular.
-round-stock = Como solución suya al { $strength } %: { $list }.
+round-stock = Como solución al { $strength } %: { $list }.
 round-rest = El resto como solución al { $strength } %: { $list }.
 round-stock-of = { $vessel } { $amount }
 mixed-sample = Eso es para la media de las { $count }: una muestra mezclada no enseña la más baja, y cuánto difieren no consta; una con 5 menos queda 5 por debajo. Mide algunas sueltas antes de dosificar (práctica común, sin fuente).
@@ -1200,7 +1200,7 @@ round-noted =
     }, { $list }, { $when }.
 round-noted-rest = el resto de la ronda
 round-noted-line = Anotado { $entry }: { $vessel } { $list }, { $when }.
-round-noted-each = Anotado { $entry }: { $vessel } { $list } cada uno, { $when }.
+round-noted-each = Anotado { $entry }: { $vessel }, cada uno { $list }, { $when }.
 round-noted-before = Anotado antes, y dejado: { $list }.
 round-noted-none = Ya estaba todo anotado: entradas { $entries }.
 round-not-noted = No anotado, pues no tiene una cantidad única: { $list }.
@@ -1635,10 +1635,10 @@ language-set = Contesto en español.
 language-not-yet = Ese idioma lo leo, pero todavía no contesto en él.
 button-stay-language = Seguir en español
 settings-head = Ajustes de esta bodega, y cómo cambiarlos:
-setting-set = Puesto. { $list }
+setting-set = Listo. { $list }
 setting-units =
     Unidades: { $units ->
-        [us] galones de EE. UU.
+        [us] galones (EE. UU.)
         [imperial] galones imperiales
        *[metric] litros
     } (trabajamos en galones)
@@ -1784,10 +1784,10 @@ reads-along =
 group-joined = Hola. Calculo adiciones de sulfuroso y llevo el registro de una bodega. Llámame por mi nombre, o respóndeme.
 group-how = Para empezar: T4 55 hl pH 3,58 libre 21. Más: ayuda
 corrected = Corregido.
-edited-noted = Tu cambio no cambia nada: la entrada { $entry } ({ $vessel }) vale. Si está mal: anular { $entry } y el motivo
-edited-added = Tu cambio no cambia nada: { $vessel } recibió desde entonces una adición (entrada { $entry }). Envía las cifras buenas en un mensaje nuevo.
-edited-late = Tu cambio no cambia nada: ese mensaje tiene más de 15 minutos. Envíalo como nuevo.
-edited-anew = Eso no lo tomo de un cambio. Envíalo en un mensaje nuevo.
+edited-noted = Tu edición no cambia nada: la entrada { $entry } ({ $vessel }) vale. Si está mal: anular { $entry } y el motivo
+edited-added = Tu edición no cambia nada: { $vessel } recibió desde entonces una adición (entrada { $entry }). Envía las cifras buenas en un mensaje nuevo.
+edited-late = Tu edición no cambia nada: ese mensaje tiene más de 15 minutos. Envíalo como nuevo.
+edited-anew = Eso no lo tomo de una edición. Envíalo en un mensaje nuevo.
 added-it-none =
     { $vessel ->
         [none] ¿Qué se echó, y dónde? Por ejemplo: añadidos 82 g de meta T4
@@ -1896,7 +1896,7 @@ import-unit = Los volúmenes sin unidad se leen en { $unit ->
         [hL] hectolitros
         [mL] mililitros
         [m3] metros cúbicos
-        [galUS] galones de EE. UU.
+        [galUS] galones (EE. UU.)
        *[galUK] galones imperiales
     }.
 import-problem = { $code ->
@@ -2079,9 +2079,9 @@ stock-lot =
        *[other] { " " }de { $supplier }
     }
 stock-negative = ⚠ { stock-of }: según el registro { $amount }{ stock-tablets }: entró algo que no está anotado. Anótalo, o cuenta: existencias meta 3,2 kg
-stock-low = ⚠ Queda poco: { $amount }{ stock-tablets } de { stock-of } en el almacén.
-stock-left = Quedan en el almacén: { $amount }{ stock-tablets } de { stock-of }.
-stock-short = ⚠ En el almacén según el registro: { $amount }{ stock-tablets } de { stock-of }, menos de lo que hace falta.
+stock-low = ⚠ Queda poco en el almacén: { stock-of }, { $amount }{ stock-tablets }.
+stock-left = Quedan en el almacén: { stock-of }, { $amount }{ stock-tablets }.
+stock-short = ⚠ En el almacén según el registro: { stock-of }, { $amount }{ stock-tablets }: menos de lo que hace falta.
 stock-old = ⚠ Lleva más de un año: un saco abierto pierde fuerza (práctica común, sin fuente). Mide el libre después.
 stock-oldest-lot =
     { $lot ->
