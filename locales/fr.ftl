@@ -954,7 +954,7 @@ help-people-2 = membres → qui en est
 help-people-3 = inviter caviste → un code pour une personne ; aussi responsable, visiteur
 help-people-4 = Un responsable peut tout, un caviste dose et note, un visiteur regarde.
 help-people-5 = lis tout → je réponds aux mesures claires sans qu’on m’appelle
-help-people-6 = quelle cave → où nous sommes ; à Blanca : une autre
+help-people-6 = quelle cave → laquelle ; à Blanca : y aller ; quitter Blanca : en sortir
 help-people-7 = oublie-moi → ton nom et ton numéro disparaissent
 help-lab-1 = Un titrage est calculé avec son détail ; rien n’est gardé sans ton bouton.
 help-lab-2 = AO 20 mL échantillon, 1,9 mL 0,01 N → SO2 libre ; avec T4 devant, gardé d’un bouton
@@ -1780,6 +1780,7 @@ at-others = Autres : { $list }. Pour changer : à, et le nom
 at-only = Il n’y en a pas d’autre ici.
 at-unknown = Je ne connais pas de cave « { $text } » ici. Il y a : { $list }.
 at-which = Quelle « { $text } » ? { $list }.
+cellar-left = Tu n’es plus dans { $list }. Ce que tu as noté reste dans son registre.
 cellar-named = Cette cave s’appelle maintenant { $name }.
 reads-along =
     { $on ->

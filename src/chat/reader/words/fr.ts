@@ -27,7 +27,7 @@ export const fr: Words = {
     'unit:spoon': ['cuillere', 'cuilleres', 'cuillere a cafe', 'cuilleres a cafe', 'cuillere a soupe', 'cuilleres a soupe', 'cac', 'cas', 'cuilleree', 'cuillerees', 'pincee', 'c a c', 'c a s', 'a cafe', 'a soupe', 'cuil a cafe', 'cuil a soupe', 'c a cafe', 'c a soupe', 'cuilleree a cafe'],
     'unit:none-of-ours': ['minute', 'minutes', 'heure', 'heures', 'jour', 'jours', 'semaine', 'semaines', 'mois', 'an', 'ans', 'annee', 'annees', 'secondes', 'personnes', 'caisses', 'caisse', 'cartons', 'palettes', 'palette', 'camions', 'bennes', 'benne', 'metres', 'fois', 'echantillons', 'points', 'hectares', 'lies', 'dans le chai', 'au chai', 'dehors', "a l'ombre", 'bouchons', 'cols', 'bouteilles', 'boites', 'euros', 'km', 'kilometres', 'degres brix', 'degres oechsle', 'l de gasoil', 'litres de gasoil', 'l de gazole', 'litres de gazole', "l d'essence", "litres d'essence"],
     'label:free': ['libre', 'libres', 'so2 libre', 'libre so2', 'soufre libre', 'dioxyde de soufre libre', 'anhydride sulfureux libre', 'sulfites libres', 's libre', 'libr', 'lib', 'so2 libr', 'so2 lib', 'so2 l'],
-    'label:total': ['total', 'so2 total', 'totaux', 'soufre total', 'dioxyde de soufre total', 'anhydride sulfureux total', 'tot', 'so2 t', 'so2 tot'],
+    'label:total': ['total', 'so2 total', 'totaux', 'soufre total', 'dioxyde de soufre total', 'anhydride sulfureux total', 'tot', 'so2 tot'],
     'label:so2': ['anhydride sulfureux', 'dioxyde de soufre', 'sulfureux'],
     'label:temperature': ['temperature'],
     'label:alcohol': ['alcool', 'tav', 'titre alcoometrique', 'degre alcoolique'],
