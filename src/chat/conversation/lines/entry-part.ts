@@ -87,7 +87,8 @@ function eventValues(
 
 /** What was told of a vessel; of what was moved its volume. */
 function toldParts(entry: VesselChange, unit: Here['settings']['volumeUnit'], mark: DecimalMark): Part[] {
-  const { style, category, product, organic, stage, alcohol_percent, volume_L, capacity_L } = entry;
+  const { style, category, product, organic, stage, alcohol_percent, sugar_g_L, volume_L, capacity_L } =
+    entry;
   return [
     ...(volume_L === undefined ? [] : [part('fact-volume', { volume: volumeText(volume_L, unit, mark) })]),
     ...(capacity_L === undefined
@@ -102,5 +103,6 @@ function toldParts(entry: VesselChange, unit: Here['settings']['volumeUnit'], ma
     ...(alcohol_percent === undefined
       ? []
       : [part('fact-alcohol', { percent: numberText(alcohol_percent, 2, mark) })]),
+    ...(sugar_g_L === undefined ? [] : [part('fact-sugar', { sugar: numberText(sugar_g_L, 2, mark) })]),
   ];
 }

@@ -41,7 +41,7 @@ function hasCompany(board: Board, i: number): boolean {
 }
 
 /** Words of what the law asks about a wine: the figure beside one has a meaning, and its unit is no reading's. */
-const OF_THE_LAW: readonly Tag[] = ['cue:designated', 'cue:density', 'cue:keep', 'cue:bottling-reserve'];
+const OF_THE_LAW: readonly Tag[] = ['cue:designated', 'cue:density', 'cue:keep', 'cue:bottling-reserve', 'label:sugar']; // prettier-ignore
 
 const isAboutLaw = ({ cues }: Board): boolean => OF_THE_LAW.some((tag) => cues.has(tag));
 

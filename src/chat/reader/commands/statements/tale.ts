@@ -1,6 +1,7 @@
 import type { Board, Finding } from '../../board.ts';
 import { freshBoard, saysMany } from '../../board.ts';
 import { findKind } from '../../finders/kind.ts';
+import { findLabelled } from '../../finders/labels.ts';
 import { findLawFacts } from '../../finders/law-facts.ts';
 import { findStage } from '../../finders/stage.ts';
 import { findVessel } from '../../finders/vessel.ts';
@@ -24,7 +25,7 @@ export interface Tale {
 }
 
 const GOES: ReadonlySet<OwnWordId> = new Set(['moved', 'racked', 'pumped', 'blended']);
-const FINDERS = [findStage, findWhen, findVessel, findLawFacts, findVolume, findKind];
+const FINDERS = [findStage, findWhen, findVessel, findLawFacts, findVolume, findLabelled, findKind];
 
 const isStop = ({ kind, text, gap }: Piece): boolean =>
   kind === 'break' || (kind === 'mark' && (/^[,.;:!=]$/.test(text) || (text === '-' && gap)));
@@ -48,6 +49,9 @@ const isMended = (board: Board, { field, from, to }: Finding): boolean =>
     .slice(from, to + 1)
     .some(({ text, tags }) => tags.length > 0 && !board.lexicon.phrases.has(spacedOf(text, board)));
 
+/** To stop a fermentation is a wish, and answered with a warning. */
+const isToStop = ({ notes }: Board): boolean => notes.some(({ id }) => id === 'ferment-stop');
+
 const saysTwoVolumes = ({ findings }: Board): boolean =>
   new Set(findings.flatMap(({ field, value }) => (field === 'volume_L' ? [value] : []))).size > 1;
 
@@ -65,7 +69,7 @@ export function taleOf(board: Board): Tale | undefined {
   for (const find of FINDERS) find(own);
   const isOfVessel = own.findings.some(({ field }) => field === 'vessel' || field === 'vessels');
   const isUnclear = own.problems.length > 0 || own.findings.some((one) => isMended(own, one));
-  if (!isOfVessel || isUnclear || saysTwoVolumes(own) || isToCome(own)) return undefined;
+  if (!isOfVessel || isUnclear || saysTwoVolumes(own) || isToCome(own) || isToStop(own)) return undefined;
   const items: Item[] = [];
   for (const piece of own.pieces) {
     const finding = own.findings.find(({ from, to }) => piece.from >= from && piece.to <= to);

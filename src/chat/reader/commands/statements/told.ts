@@ -5,7 +5,7 @@ import type { Item, Tale } from './tale.ts';
 import { findsOnly, tells, tellsOnly } from './tale.ts';
 
 const KIND = [
-  'style', 'category', 'product', 'organic', 'stage', 'designated_mg_L', 'uplift', 'quality', 'pdo', 'bulk', 'density_kg_L', 'reserve_mg_L',
+  'style', 'category', 'product', 'organic', 'stage', 'designated_mg_L', 'uplift', 'quality', 'pdo', 'bulk', 'density_kg_L', 'reserve_mg_L', 'sugar_g_L',
 ] as const; // prettier-ignore
 
 /** `T4 finished`: the word behind the vessel and alone; `we finished T4` tells of work. */
