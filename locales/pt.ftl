@@ -221,7 +221,7 @@ dose-at-limit =
         }
     }
 dose-over-already = Por essa lei não se pode vender assim{ law-decides }: fala com quem responde por este vinho.
-law-assumed = Não sei, e por isso conto o mais apertado para o limite: { $list }.
+law-assumed = Por saber, conto o mais apertado: { $list }.
 law-unknown =
     { $code ->
         [colour-assumed] cor
@@ -367,7 +367,7 @@ choice-red =
         [over] Se for tinto, { $red } pede { $free } de livre: sem quantidade, o total passava { $limit } ({ law-of }).
        *[other] Se for tinto, { $red } pede { $free } de livre: { bare-amount }.
     }
-ways-out = Ou: mais frio, mais limpo, vigiado mais vezes; acidificar para baixar o pH: pergunta a quem sabe.
+ways-out = Ou: mais frio, mais limpo, vigiar mais; baixar o pH com ácido: pergunta a quem sabe.
 
 ## A fase
 
@@ -381,7 +381,7 @@ bottling-each =
     }
 bottling-measured = Medido em números do setor (por confirmar) são { $each } por 1: então chegavam { bare-amount }. Para contar assim: oxigénio { $oxygen } mg/L x { $each }
 bottling-measured-none = Medido em números do setor (por confirmar) são { $each } por 1: então não é preciso nada. Para contar assim: oxigénio { $oxygen } mg/L x { $each }
-condition-stage = Só se a malolática estiver feita ou não for para fazer.
+condition-stage = Só com a malolática feita, ou se não se quer.
 condition-red =
     { $kind ->
         [none] Se for tinto ({ $red } molecular): nada a adicionar.
@@ -411,16 +411,16 @@ stage-word =
 
 ## O que faz
 
-effect-land = { $after } { $unit } de livre se nada se combinar; conta com { $range }, em geral combina-se um terço a metade; mede amanhã.
-effect-land-molecular = De { $molecularNow } para { $molecular } molecular: { $after } { $unit } de livre se nada se combinar; conta com { $range }, em geral combina-se um terço a metade; mede amanhã.
-effect-land-to-molecular = Para { $molecular } molecular: { $after } { $unit } de livre se nada se combinar; conta com { $range }, em geral combina-se um terço a metade; mede amanhã.
+effect-land = { $after } { $unit } de livre se nada se combinar; conta com { $range } (em geral combina-se 1/3 a 1/2); mede amanhã.
+effect-land-molecular = De { $molecularNow } para { $molecular } molecular: { $after } { $unit } de livre se nada se combinar; conta com { $range } (em geral combina-se 1/3 a 1/2); mede amanhã.
+effect-land-to-molecular = Para { $molecular } molecular: { $after } { $unit } de livre se nada se combinar; conta com { $range } (em geral combina-se 1/3 a 1/2); mede amanhã.
 effect-land-low = { $after } { $unit } de livre se nada se combinar; abaixo de 10 de livre pode combinar-se muito ou tudo: conta com { $range }, mede antes de voltar a adicionar.
 effect-land-small = { $after } { $unit } de livre no máximo: a subida é menor do que o erro de uma análise.
-effect-rise = O livre sobe cerca de { $range } { $unit }, em geral combina-se um terço a metade; mede amanhã.
+effect-rise = O livre sobe cerca de { $range } { $unit } (em geral combina-se 1/3 a 1/2); mede amanhã.
 effect-must = A maior parte combina-se enquanto o mosto fermenta: não protege o vinho mais tarde.
 must-comes-back = Cerca de um terço volta como SO2 total: + { $total } { $unit } (texto alemão do setor, 2012).
 must-yeast = Leveduras { $least } a { $most } horas depois (prática comum, sem fonte).
-must-malolactic = Até { $most } { $unit } antes do esmagamento não prejudica a malolática (AWRI).
+must-malolactic = Até { $most } { $unit } antes do esmagamento não prejudicam a malolática (AWRI).
 must-published =
     { $read ->
         [read] Publicado: { $list } ({ $source }).
@@ -440,7 +440,7 @@ must-colour =
     }
 must-say-state = Como vem a uva? Diz sã, algum dano ou podridão, e há um número para escolher.
 button-published = Adicionar { $add }
-effect-raise = + { $dose } { $unit } se nada se combinar; em geral combina-se um terço a metade; mede amanhã.
+effect-raise = + { $dose } { $unit } se nada se combinar (em geral combina-se 1/3 a 1/2); mede amanhã.
 third-needs =
     { $third ->
         [more] ; se for um terço, é preciso mais metade
@@ -459,8 +459,8 @@ nothing-why-free = { $free } de livre; o objetivo é { target }.
 
 adds =
     { $number ->
-        [many] { at }{ $list } dão { $adds } de SO2
-       *[one] { at }{ $list } dá { $adds } de SO2
+        [many] { at }{ $list } são { $adds } de SO2
+       *[one] { at }{ $list } são { $adds } de SO2
     }
 adds-rate = { at }«{ $rate }» ({ $ofAdditive } de { additive }) dá { $adds } de SO2
 amount = { $amount } de { additive }
@@ -497,8 +497,8 @@ solution-colder = Abaixo de { $celsius } °C não há número publicado: vê se 
 solution-holding = Solução de conservação, { $volume }: { $acid } de ácido cítrico, { $amount } de { additive }.
 solution-rinse = Enxaguamento, { $volume }: { $acid } de ácido cítrico, { $amount } de { additive }.
 solution-order = Primeiro a água toda, depois o ácido, o sulfito no fim e aos poucos. Nunca pó sobre ácido.
-solution-air = Liberta SO2: ventila, afasta a cara, também do batoque.
-solution-for-holding = Para barrica vazia e limpa, cheia até ao batoque; vê-a de poucas em poucas semanas.
+solution-air = Liberta SO2: ventila, cara longe do batoque.
+solution-for-holding = Para barrica vazia e limpa, cheia até cima; vê-a a cada poucas semanas.
 solution-for-rinse = Para equipamento limpo: molha tudo, deixa atuar uns minutos.
 solution-drain = Despeja como mandam as regras locais. Passa por água antes de entrar vinho.
 solution-practice = { $salt } e { $acid } g/L: prática comum, sem fonte. Com um número teu: { $use ->
@@ -585,7 +585,7 @@ fact-strength =
         [SO2-per-100mL] { additive }, { $strength } % = { $strength } g de SO2 em 100 mL
        *[noted] { additive }, { $strength } %
     }
-assumed-additive = { additive }, puro
+assumed-additive = { additive } puro
 assumed-target = objetivo { target }
 assumed-target-red = objetivo { target } (tinto)
 assumed-target-sweet = objetivo { target } (doce)
@@ -602,8 +602,8 @@ assumed-barrels =
     }
 note-free-unlabelled = «{ $text }» é SO2 livre
 note-ph-unlabelled = «{ $text }» é o pH
-note-round-ph = um decimal sozinho é o pH
-note-round-free = um número sozinho é SO2 livre
+note-round-ph = decimal sozinho = pH
+note-round-free = número sozinho = SO2 livre
 note-volume-sum = «{ $text }» somado
 note-strength-as-salt = a força são gramas do sal em 100 mL; como SO2 seria { $factor } vezes mais forte
 note-strength-as-SO2 = a força são gramas de SO2 em 100 mL
@@ -717,7 +717,7 @@ problem-no-number =
 problem-share = { at }«{ $about }»: conto no máximo 4/5 (0,8) que se combinam.
 problem-vessel-twice = { $vessel } vem duas vezes: manda uma só.
 problem-two-vessels = «{ $about }»: duas vasilhas. Manda uma linha para cada.
-no-such-choice = { $text } aqui não há: de a a { $last }, ou o nome.
+no-such-choice = { $text } aqui não há: de a até { $last }, ou o nome.
 no-such-button = { $text } aqui não há: de 1 a { $last }, ou uma análise inteira.
 
 ## Avisos
@@ -819,16 +819,16 @@ cautions = ⚠ { $list }
 caution-trained-people-with-breathing-apparatus = Só gente formada, com aparelho respiratório à mão.
 caution-grapes-and-must-only = Só para uva e mosto.
 caution-ventilate = Ventila.
-caution-never-lean-in = Nunca te debruces numa cuba.
-caution-gloves-goggles = Luvas, óculos de proteção.
-caution-no-acid-no-chlorine = Nunca com ácidos nem produtos com cloro.
-caution-no-other-acid-no-chlorine = Sem outro ácido, sem produtos com cloro.
-caution-asthma = Não é para asmáticos.
-caution-crush-first = Esmaga, dissolve num pouco de vinho ou água.
-caution-dissolve-first = Dissolve antes num pouco de vinho ou água.
-caution-foams-with-carbon-dioxide = Vinho cheio de CO2 transborda em espuma.
-caution-mix-and-measure-again = Homogeneíza, mede ao fim de um dia.
-caution-label-and-rules-first = Primeiro o rótulo, as regras locais, quem é qualificado.
+caution-never-lean-in = Não te debruces na cuba.
+caution-gloves-goggles = Luvas, óculos.
+caution-no-acid-no-chlorine = Nunca com ácido nem cloro.
+caution-no-other-acid-no-chlorine = Nem outro ácido nem cloro.
+caution-asthma = Asmáticos não.
+caution-crush-first = Esmaga, dissolve em pouco vinho ou água.
+caution-dissolve-first = Dissolve antes em pouco vinho ou água.
+caution-foams-with-carbon-dioxide = Vinho com muito CO2 transborda.
+caution-mix-and-measure-again = Homogeneíza, mede no outro dia.
+caution-label-and-rules-first = Antes: rótulo, regras locais, gente qualificada.
 cautions-of = ⚠ { additive }: { $list }
 cautions-short = ⚠ Cuidados como antes: botão Segurança.
 
@@ -949,7 +949,7 @@ help-people-2 = pessoas → quem está
 help-people-3 = convidar adegueiro → um código para uma pessoa; também responsável, convidado
 help-people-4 = O responsável pode tudo, o adegueiro doseia e regista, o convidado vê.
 help-people-5 = lê tudo → respondo a análises claras sem ser chamado
-help-people-6 = que adega → em que adega estamos; em Alva: outra
+help-people-6 = que adega → em que adega estamos; em Alva: ir para lá; sair de Alva: sair dela
 help-people-7 = esquece-me → o teu nome e número saem
 help-lab-1 = Uma titulação vem com as contas; nada se guarda antes de tocares.
 help-lab-2 = AO 20 mL amostra, 1,9 mL 0,01 N → SO2 livre; com T4 à frente, guarda-se num toque
@@ -1157,13 +1157,12 @@ round-red = «Se for tinto» é para { $red } molecular.
 round-stock = Como solução dele a { $strength } %: { $list }.
 round-rest = O resto como solução a { $strength } %: { $list }.
 round-stock-of = { $vessel } { $amount }
-mixed-sample = Isto é para a média das { $count }: uma amostra misturada não mostra a mais baixa. Quanto diferem não está no ficheiro; a que estiver 5 abaixo fica 5 abaixo. Mede algumas à parte antes de dosear todas (prática comum, sem fonte).
+mixed-sample = É para a média das { $count }: uma amostra misturada não mostra a mais baixa. Quanto diferem não sei; a que está 5 abaixo fica 5 abaixo. Mede algumas à parte antes de dosear todas (prática comum, sem fonte).
 round-mixed = ⚠ Uma amostra misturada dá a média e não a mais baixa: { $list }. Mede algumas à parte.
 round-low = ⚠ Abaixo de 10 de livre pode combinar-se muito ou tudo: { $list }. Aí mede antes de voltar a adicionar.
 round-name = { $name }
 round-again = Manda outra vez, inteira, cada linha que não se leu.
-round-total =
-    Ao todo { $list }: somadas as { $count } quantidades arredondadas.
+round-total = Ao todo { $list } (soma das { $count } arredondadas).
 round-total-of =
     { $kind ->
         [tablet] { $amount } pastilhas efervescentes de { $size } g de SO2
@@ -1230,7 +1229,7 @@ sheet-nothing = nada a adicionar
 sheet-limit = limite
 sheet-title = Folha de pesagem
 sheet-open = Sem quantidade:
-sheet-caution = Luvas, óculos, ventilar. Nunca te debruces numa cuba. Homogeneíza, mede amanhã.
+sheet-caution = Luvas, óculos, ventilar. Não te debruces na cuba. Homogeneíza, mede amanhã.
 sheet-fetch = Ao todo { $list }
 sheet-additive-name = { additive }{ round-percent }
 file-round = Uma ronda de { $count } linhas.
@@ -1246,8 +1245,8 @@ round-not-understood =
         [none] Há uma linha que não percebi.
        *[other] «{ $about }» não percebi.
     }
-round-effect-short = Em geral combina-se um terço a metade: mede amanhã.
-round-effect = De uma adição combina-se em geral um terço a metade: mede amanhã. Para ver as contas de uma vasilha manda só a linha dela.
+round-effect-short = Em geral combina-se 1/3 a 1/2: mede amanhã.
+round-effect = Em geral combina-se 1/3 a 1/2: mede amanhã. Contas de uma vasilha: manda só a linha dela.
 choice-additive = { $value ->
         [potassium-metabisulfite] Metabissulfito de potássio
         [sodium-metabisulfite] Metabissulfito de sódio
@@ -1790,6 +1789,7 @@ at-others = Outras: { $list }. Para mudar: em, e o nome
 at-only = Aqui não há outra.
 at-unknown = Não conheço aqui adega «{ $text }». Há: { $list }.
 at-which = Que «{ $text }»? { $list }.
+cellar-left = Saíste de { $list }. O que registaste fica no registo dela.
 cellar-named = Esta adega chama-se agora { $name }.
 reads-along =
     { $on ->
@@ -2094,9 +2094,21 @@ stock-lot =
        *[other] { " " }de { $supplier }
     }
 stock-negative = ⚠ { stock-of }: o registo dá { $amount }{ stock-tablets }: chegou alguma coisa que não está registada. Regista-a, ou conta: stock meta 3,2 kg
-stock-low = ⚠ Está a acabar: { $amount }{ stock-tablets } de { stock-of } em stock.
-stock-left = Agora em stock: { $amount }{ stock-tablets } de { stock-of }.
-stock-short = ⚠ Em stock pelo registo: { $amount }{ stock-tablets } de { stock-of }, menos do que isto leva.
+stock-low =
+    ⚠ Está a acabar: { $amount }{ stock-tablets } { $additive ->
+        [tablet] { stock-of }
+       *[other] de { stock-of }
+    } em stock.
+stock-left =
+    Agora em stock: { $amount }{ stock-tablets } { $additive ->
+        [tablet] { stock-of }
+       *[other] de { stock-of }
+    }.
+stock-short =
+    ⚠ Em stock pelo registo: { $amount }{ stock-tablets } { $additive ->
+        [tablet] { stock-of }
+       *[other] de { stock-of }
+    }, menos do que isto leva.
 stock-old = ⚠ Está cá há mais de um ano: um saco aberto perde força (prática comum, sem fonte). Depois dele mede o SO2 livre.
 stock-oldest-lot =
     { $lot ->
