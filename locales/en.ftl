@@ -926,7 +926,7 @@ help-people-2 = people → who is in
 help-people-3 = invite hand → a code for one person; also keeper, guest
 help-people-4 = A keeper may do everything, a hand doses and logs, a guest looks.
 help-people-5 = read along → I answer plain readings uncalled
-help-people-6 = at → which cellar we are in; at Blanca: another one
+help-people-6 = at → which cellar; at Blanca: go there; leave Blanca: leave it
 help-people-7 = forget me → your name and number come off
 help-lab-1 = A titration is reckoned with its working; nothing is kept before you tap.
 help-lab-2 = AO 20 mL sample, 1.9 mL 0.01 N → free SO2; with T4 in front, kept by one tap
@@ -1751,6 +1751,7 @@ at-others = Others: { $list }. To change: at, and the name
 at-only = There is no other here.
 at-unknown = I know no cellar “{ $text }” here. There are: { $list }.
 at-which = Which “{ $text }”? { $list }.
+cellar-left = You are out of { $list }. What you noted stays in its log.
 cellar-named = This cellar is { $name } now.
 reads-along =
     { $on ->
@@ -2150,7 +2151,10 @@ titration-asks = { $missing ->
 }
 titration-either = { $strength } N gives { $normal } { $unit }, { $strength } M gives { $molar } { $unit }.
 button-keep-result = Keep it
-button-keep-of = Keep { $vessel }
+button-keep-of = Keep { $vessel }{ $of ->
+    [total] {" "}total
+   *[free] {""}
+}
 
 # The laboratory: how far a dose may be off, tables, both bases
 

@@ -3,7 +3,7 @@ import type { AdditiveAtHand } from '../../core/additives/additive-id.ts';
 import type { Reading, Understood } from '../reader/understood.ts';
 import type { Button, Line, Reply } from '../replies/reply.ts';
 import { answerReading } from './answer-reading.ts';
-import { buttonsFor } from './buttons.ts';
+import { buttonsFor, keepButtons } from './buttons.ts';
 import type { RoundSheet } from '../attachments/round/round-sheet.ts';
 import { roundBody, roundFootShown } from './lines/round-body.ts';
 import { roundFoot, type SaidInRound } from './lines/round-foot.ts';
@@ -28,6 +28,9 @@ import { withShared } from './with-shared.ts';
 
 /** Vessels in one message; the others follow in a second one. */
 const VESSELS_A_MESSAGE = 25;
+
+/** So many results of titrations have a button each. */
+const RESULTS_A_MESSAGE = 8;
 
 /** A round of vessels: a line each; the stage, what was assumed and the cautions once. Nothing waits for an answer. */
 export function answerRound(understood: Understood, here: Here): Handled {
@@ -57,6 +60,7 @@ export function answerRound(understood: Understood, here: Here): Handled {
   const buttons = [
     ...(sheet === undefined ? [] : roundButtons(sheet, here)),
     ...safetyButton(said, cautioned),
+    ...keepButtons(said.flatMap(resultOf).slice(0, RESULTS_A_MESSAGE)),
   ].map((button, at) => ({ ...button, mark: String(at + 1) }));
   const { language } = settings;
   const replies: Reply[] =
@@ -103,6 +107,17 @@ export function answerRound(understood: Understood, here: Here): Handled {
     answers: said.map(({ outcome }) => outcome.answer),
     ...(sheet !== undefined && { round: roundData(sheet) }),
   };
+}
+
+/** A titration of a vessel that may be kept as its reading. */
+function resultOf({
+  outcome,
+  ref,
+  reading,
+}: SaidInRound): { ref: string; vessel: string; of: 'free' | 'total' }[] {
+  const { vessel } = reading.fields;
+  const mayBeKept = outcome.buttons.some(({ key }) => key === `k:${ref}`);
+  return mayBeKept && vessel !== undefined ? [{ ref, vessel, of: reading.titration?.of ?? 'free' }] : [];
 }
 
 /** Whether the cautions of an additive are said in full. */

@@ -3,6 +3,7 @@ import type { DoseChoice } from '../../core/dose/answer.ts';
 import { mustFigures } from '../../core/dose/must-ranges.ts';
 import type { AskedField, Fields, Reading } from '../reader/understood.ts';
 import { numberText } from '../replies/number-text.ts';
+import { vesselName } from '../replies/vessel-name.ts';
 import { volumeText } from '../replies/volume-text.ts';
 import type { Button } from '../replies/reply.ts';
 import type { SentenceKey } from '../replies/sentence-keys.ts';
@@ -55,6 +56,18 @@ export function buttonsFor(ref: string, does: readonly (keyof typeof LABELS)[]):
     mark: String(at + 1),
     label: LABELS[one],
     values: {},
+  }));
+}
+
+/** A button for each of several titrations, which keeps it as a reading of its vessel; marked as they stand. */
+export function keepButtons(
+  results: readonly { readonly ref: string; readonly vessel: string; readonly of: 'free' | 'total' }[],
+): Button[] {
+  return results.map(({ ref, vessel, of }, at) => ({
+    key: `k:${ref}`,
+    mark: String(at + 1),
+    label: 'button-keep-of' as const,
+    values: { vessel: vesselName(vessel), of },
   }));
 }
 

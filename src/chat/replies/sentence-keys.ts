@@ -90,7 +90,7 @@ export interface SentenceValues {
   'button-file-note': never;
   'button-file-vessels': never;
   'button-full-dose': never;
-  'button-keep-of': 'vessel';
+  'button-keep-of': 'of' | 'vessel';
   'button-keep-result': never;
   'button-mine': never;
   'button-more': never;
@@ -135,6 +135,7 @@ export interface SentenceValues {
   'cautions-separator': never;
   'cautions-short': never;
   'cellar-called': 'cellar' | 'keeper';
+  'cellar-left': 'list';
   'cellar-named': 'name';
   'chat-greeting': never;
   'chat-help-care': never;

@@ -3,6 +3,7 @@ import { doubtOf } from '../doubt.ts';
 import { line } from '../lines/line.ts';
 import { problemLines, shortened } from '../lines/problems.ts';
 import { BURNING_SULFUR } from './chat.ts';
+import { titrationFacts } from '../lines/titration.ts';
 import { vesselText } from '../lines/vessel.ts';
 import type { Outcome, Turn } from '../outcome.ts';
 
@@ -19,13 +20,15 @@ function isOfTooStrongStock({ marks, problems, fields }: Reading): boolean {
 
 /** A message with something wrong in it: what, and what to send instead; never a figure beside it. */
 export function answerProblem(reading: Reading, { manner }: Turn): Outcome {
-  const doubt = doubtOf(reading);
+  // A figure of a titration alone could be any of its volumes: it is sent whole.
+  const doubt = reading.intent === 'titration' ? undefined : doubtOf(reading);
   const again = doubt === undefined ? 'whole' : 'correction';
   const lines = reading.marks.wick
     ? BURNING_SULFUR.map((key) => line('first', key))
     : problemLines(reading, vesselText(reading), manner.mark, again);
   if (isOfTooStrongStock(reading)) lines.splice(0, 1, line('first', 'solution-strengths'));
   const unread = reading.problems.find(({ code }) => code === 'not-understood');
+  if (reading.titration) lines.push(...titrationFacts(reading.titration, manner, reading.fields.ph));
   const inRound = unread
     ? [line('first', 'round-not-understood', { about: wordsOf(unread.about, reading) })]
     : lines.slice(0, 1);

@@ -20,23 +20,26 @@ export function answerTitration(reading: Reading, turn: Turn): Outcome {
   if (titration === undefined || answer === undefined) return gap(reading, turn);
   const { vessel } = reading.fields;
   const first = resultLine(reading, titration, answer, manner);
+  const tooMuch = isTooMuch(answer) ? [line('first', 'titration-too-much')] : [];
   const high = redReadsHigh(reading, turn);
   return {
     answer,
-    inRound: [first],
+    inRound: [first, ...tooMuch],
     lines: [
       first,
-      ...(isTooMuch(answer) ? [line('first', 'titration-too-much')] : []),
+      ...tooMuch,
       ...titrationMeaning(said, titration, answer, manner),
       ...high,
       ...(vessel === undefined ? [line('question', 'titration-name-vessel')] : []),
-      ...titrationFacts(said, manner),
+      ...titrationFacts(said, manner, reading.fields.ph),
       ...titrationAssumed(said),
       ...assumedLines(reading, manner),
       ...workingLines(answer.steps, manner),
     ],
     buttons: vessel === undefined || here.role === 'guest' || isTooMuch(answer) ? [] : buttonsFor(ref, ['k']),
+    // In a round it is not said.
     ...(high.length > 0 &&
+      turn.round === undefined &&
       vessel !== undefined && { keeps: [{ kind: 'keep', key: redToldKey(vessel), text: '1' } as const] }),
   };
 }

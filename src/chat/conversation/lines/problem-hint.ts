@@ -43,8 +43,8 @@ export function hintFor(reading: Reading, words: string, mark: DecimalMark): Hin
   const none = { one: first, two: second, named: '' };
   const { fields } = reading;
   const { additive } = fields;
-  // What no wine has is no figure to write otherwise.
-  if (first.length > MOST_DIGITS || second.length > MOST_DIGITS)
+  // A figure of a titration is no SO2, and what no wine has is no figure to write otherwise.
+  if (reading.intent === 'titration' || first.length > MOST_DIGITS || second.length > MOST_DIGITS)
     return { kind: 'other', one: '', two: '', named: '' };
   const split = /(\d)[.,]\s+(\d+)/.exec(about);
   if (split) return { ...none, kind: 'split', one: `${split[1]}${mark}${split[2]}` };

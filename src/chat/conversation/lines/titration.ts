@@ -29,8 +29,8 @@ export function resultLine(
   });
 }
 
-/** The volumes and the titrant as they were read. */
-export function titrationFacts(said: SaidTitration, { mark }: Manner): Line[] {
+/** The volumes and the titrant as they were read, and a pH that stands beside them. */
+export function titrationFacts(said: SaidTitration, { mark }: Manner, ph?: number): Line[] {
   const { sample_mL, titrant_mL, blank_mL, titrant, ascorbic_mg_L } = said;
   const text = (value: number): string => numberText(value, 4, mark);
   const parts = [
@@ -48,6 +48,7 @@ export function titrationFacts(said: SaidTitration, { mark }: Manner): Line[] {
           ]
         : [part('titration-iodate', { mass: text(titrant.iodate_mg), volume: text(titrant.flask_mL) })]),
     ...(ascorbic_mg_L === undefined ? [] : [part('titration-ascorbic', { amount: text(ascorbic_mg_L) })]),
+    ...(ph === undefined ? [] : [part('fact-ph', { ph: numberText(ph, 2, mark) })]),
   ];
   return listLine('assumed', 'titration-read', parts);
 }

@@ -19,7 +19,12 @@ export async function keepTitration(found: Remembered, here: Here, view: CellarV
   const before = await view.entriesOfKeys(event);
   const result = resultOf(answer);
   const kept = emptyReading('reading', {
-    fields: { vessel, ...(answer.free_mg_L === undefined ? { total_mg_L: result } : { free_mg_L: result }) },
+    fields: {
+      vessel,
+      ...(reading.fields.style && { style: reading.fields.style }),
+      ...(reading.fields.ph !== undefined && { ph: reading.fields.ph }),
+      ...(answer.free_mg_L === undefined ? { total_mg_L: result } : { free_mg_L: result }),
+    },
     said_at: reading.said_at ?? at,
     ...(reading.when && { when: reading.when }),
     ...(reading.concentrationUnit && { concentrationUnit: reading.concentrationUnit }),

@@ -145,12 +145,13 @@ function findWish(board: Board, i: number): boolean {
   return true;
 }
 
-/** Finds the figures that a label before or after them names. */
-export function findLabelled(board: Board): void {
+/** Finds the figures that a label before or after them names; of one label only, where it is given. */
+export function findLabelled(board: Board, only?: LabelId): void {
   for (const weak of [false, true]) {
     for (let i = 0; i < board.terms.length; i++) {
-      if (findWish(board, i)) continue;
       const label = labelAt(board, i);
+      if (only !== undefined && label !== only) continue;
+      if (findWish(board, i)) continue;
       const isPercentVolume = label === 'volume' && isMark(board, i - 1, '%');
       if (label !== undefined && !isPercentVolume && (label === 'so2' || label === 'volume') === weak)
         findLabel(board, i, label);

@@ -15,6 +15,13 @@ const OURS: ReadonlySet<OwnWordId> = new Set(['sampled', 'who', 'at', 'on']);
 /** Small words of an addition, beside which a time may stand. */
 const SMALL: ReadonlySet<OwnWordId> = new Set(['to', 'of', 'with', 'lot', 'number']);
 
+/** A word of a titration (`AO`, `0.01 N`), beside which the time is the sample's. */
+const isOfLab = ({ ids }: Piece): boolean => ids.some((id) => id.startsWith('lab-'));
+
+/** The words that make a message a titration. */
+const isMethod = ({ ids }: Piece): boolean =>
+  ids.some((id) => /^lab-(aeration|iodine|naoh|iodate|titration)$/.test(id));
+
 const isOurs = ({ ids }: Piece): boolean => ids.some((id) => OURS.has(id));
 
 const isBusy = (board: Board, piece: Piece): boolean =>
@@ -34,6 +41,7 @@ const isUnknown = (board: Board, k: number): boolean => {
     !isOurs(piece) &&
     !isCode(board, k) &&
     piece.text.length > 1 &&
+    !isOfLab(piece) &&
     termAt(board, piece.from).tags.length === 0
   );
 };
@@ -92,7 +100,9 @@ function standsInReading(board: Board, part: Part, around: readonly number[]): b
     return false;
   if (part.isPast) return !unknown || around.some((at) => pieces[at]?.kind === 'number');
   if (unknown) return false;
-  const isLed = isOwn(pieces, part.from - 1, 'at') && (pieces[k] === undefined || isFigure(board, k));
+  const isTitrated = part.isPointed !== true && around.some((at) => isMethod(pieces[at] as Piece));
+  const isLed =
+    isTitrated || (isOwn(pieces, part.from - 1, 'at') && (pieces[k] === undefined || isFigure(board, k)));
   if (part.day === undefined) return isLed;
   // The name of a day alone may head a list that is written on that day.
   return part.day.is !== 'weekday' || part.hour !== undefined || isOwn(pieces, part.from - 1, 'on');
@@ -113,6 +123,9 @@ export function stands(board: Board, part: Part): boolean {
   // `free yesterday at 8.30` has a label whose figure that is.
   const label = termAt(board, pieces[before(board, part)]?.from ?? -1).tags;
   if (part.isPointed && label.some((tag) => tag.startsWith('label:'))) return false;
+  // `sample 0.01 N`: the strength of a titrant, and no minute past midnight.
+  const next = pieces[part.to + 1];
+  if (part.isPointed && next !== undefined && isOfLab(next)) return false;
   const around = segmentOf(board, part);
   return board.pastTense || board.tells
     ? standsInFact(board, part, around)

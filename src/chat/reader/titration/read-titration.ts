@@ -2,6 +2,7 @@ import type { Board } from '../board.ts';
 import { freshBoard, wordsOf } from '../board.ts';
 import { draftOfBoard } from '../draft-of-board.ts';
 import { findKind } from '../finders/kind.ts';
+import { findLabelled } from '../finders/labels.ts';
 import { findVessel } from '../finders/vessel.ts';
 import { findWhen } from '../finders/when.ts';
 import { isOwn } from '../own-pieces.ts';
@@ -19,6 +20,9 @@ const OPENERS: readonly OwnWordId[] = [
   'lab-iodate',
   'lab-titration',
 ];
+
+/** The methods: beside one of these a volume in millilitres is of a titration, also where nothing else is told. */
+const METHODS: readonly OwnWordId[] = ['lab-aeration', 'lab-iodine', 'lab-naoh', 'lab-iodate'];
 
 /** Samples that a pipette takes, mL (common practice, no source): an unlabelled volume of another size is none. */
 const PIPETTES_mL: readonly number[] = [5, 10, 20, 25, 50, 100];
@@ -38,18 +42,19 @@ export function readTitration(board: Board): Draft | undefined {
   findWhen(own);
   findVessel(withoutLabWords(own));
   findKind(own);
+  findLabelled(own, 'ph');
   const figures = labFigures(own);
   if (!isTitration(own, figures)) return undefined;
   const said: Mutable = { ...methodOf(own), ...whichSO2(own) };
   const rest = takeTitrant(own, figures, said);
   const labels = labelFigures(own.pieces, rest);
-  const left = takeVolumes(rest, labels, said);
+  const left = takeBareTitrant(takeVolumes(rest, labels, said), said);
   for (const figure of figures) claimFigure(own, figure);
   refuseSeveral(own);
-  // Two volumes that could be either are asked for by what is missing.
+  // Figures that could be either are asked for by what is missing.
   const isAsked = said.sample_mL === undefined || said.titrant_mL === undefined;
   for (const figure of left)
-    if (!isAsked || figure.unit !== 'mL')
+    if (!isAsked || (figure.unit !== 'mL' && figure.unit !== undefined))
       own.problems.push({ code: 'ambiguous-number', about: figureWords(own, figure) });
   if (said.blank_mL !== undefined && said.titrant_mL !== undefined && said.blank_mL > said.titrant_mL)
     own.problems.push({ code: 'conflicting-values', about: `${said.blank_mL} / ${said.titrant_mL}` });
@@ -79,14 +84,21 @@ function withoutLabWords(board: Board): Board {
 
 /**
  * Two volumes in millilitres, or one beside the strength of a titrant; or sample and titrant by their names. A sample
- * alone may stand beside readings that are told already.
+ * alone may stand beside readings that are told already; one volume beside a method and nothing of them is a titration
+ * of which something is missing.
  */
-function isTitration({ pieces }: Board, figures: readonly LabFigure[]): boolean {
+function isTitration(board: Board, figures: readonly LabFigure[]): boolean {
+  const { pieces, cues } = board;
   const says = (id: OwnWordId): boolean => pieces.some((_, k) => isOwn(pieces, k, id));
   const ofUnit = (...units: readonly LabFigure['unit'][]): number =>
     figures.filter(({ unit }) => unit !== undefined && units.includes(unit)).length;
   const [volumes, strengths] = [ofUnit('mL'), ofUnit('N', 'M')];
   const named = [says('lab-sample'), says('lab-titrant')].filter(Boolean).length;
+  const tellsResult = cues.has('label:free') || cues.has('label:total') || ofUnit('mg/L') > 0;
+  const isLittle = figures.length <= 2 && volumes === 1 && METHODS.some(says) && !tellsResult;
+  if (isLittle && !board.message.includes('%')) return true;
+  const isOfBurette = figures.every(({ unit }) => unit !== 'L' && unit !== 'mg' && unit !== 'mg/L');
+  if (strengths > 0 && figures.length >= 2 && isOfBurette && METHODS.some(says)) return true;
   return figures.length >= 2 && (volumes >= 2 || named === 2 || (strengths > 0 && volumes + named > 0));
 }
 
@@ -174,6 +186,20 @@ function takeVolumes(
   said.sample_mL = large;
   said.titrant_mL = small;
   return others;
+}
+
+/** Largest bare figure that is taken for what a burette gave, mL (own threshold). */
+const BURETTE_mL = 50;
+
+/** `AO 20 mL sample, 0.01 N, 1.9`: where only the burette's figure is missing, one that stands alone is it. */
+function takeBareTitrant(left: readonly LabFigure[], said: Mutable): readonly LabFigure[] {
+  const [one, other] = left;
+  const isMissing =
+    said.titrant_mL === undefined && said.sample_mL !== undefined && said.titrant !== undefined;
+  if (!isMissing || one === undefined || other !== undefined) return left;
+  if (one.unit !== undefined || one.value > BURETTE_mL) return left;
+  said.titrant_mL = one.value;
+  return [];
 }
 
 /** Whether burettes and pipettes have such volumes, and bottles such a titrant. */
