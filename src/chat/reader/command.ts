@@ -107,6 +107,7 @@ export type Command =
   | { readonly name: 'make-person'; readonly who: string; readonly role: SaidRole }
   | { readonly name: 'at'; readonly cellar?: string } // at Blanca; without a name they are listed
   | { readonly name: 'name-cellar'; readonly as: string }
+  | { readonly name: 'leave'; readonly cellar: string } // leave Blanca
   | { readonly name: 'range' } // how far the dose may be off; of a vessel, its last dose
   /** Without targets the cellar's own; without a pH from 3.0 to 4.0. */
   | {

@@ -670,6 +670,8 @@ export interface SentenceValues {
   'problem-value-out-of-range': 'about' | 'vessel';
   'problem-vessel-twice': 'vessel';
   'problem-volume-not-positive': 'about' | 'vessel';
+  'progress-done': never;
+  'progress-working': never;
   'question-after-malolactic': never;
   'question-after-malolactic-next': never;
   'question-after-malolactic-why': never;

@@ -1,4 +1,6 @@
 import type { CellarStore } from '../../core/cellar/cellar-store.ts';
+import { cellarLeftIn } from '../../chat/conversation/cellar/cellar-left-in.ts';
+import { cellarsCalled } from '../../chat/conversation/cellar/cellars-called.ts';
 import { placeOf } from '../../chat/conversation/cellar/cellar-name.ts';
 import { codeIn, readCode } from '../../chat/conversation/cellar/code.ts';
 import { roleIn } from '../../chat/conversation/cellar/role-of.ts';
@@ -93,6 +95,14 @@ export function makeDoor({ store, registry, rule, paceOf, handle }: DoorOptions)
     return isTheirs ? read.cellar : undefined;
   };
 
+  /** The cellar that a message wants to leave, where the chat has several: it is answered there. */
+  const leftBy = async (message: IncomingMessage, of: CellarsOfChat): Promise<string | undefined> => {
+    const said = of.cellars.length > 1 ? cellarLeftIn(message) : undefined;
+    if (said === undefined) return undefined;
+    const [only, another] = cellarsCalled(said, await placesOf(of));
+    return another === undefined ? only?.cellar : undefined;
+  };
+
   return {
     admit: async (message) => {
       if (message.trusted) return { message, handle };
@@ -104,11 +114,12 @@ export function makeDoor({ store, registry, rule, paceOf, handle }: DoorOptions)
       const of = await registry.cellarsOfChat(chat);
       const invited = await invitedTo(message, of);
       if (invited !== undefined) return { message: await placed(message, of, invited), handle };
+      const left = await leftBy(message, of);
       if (!mayUse(rule, message, of))
         return { message: inChats, handle: isDanger ? keepingNothing : STRANGER };
       const isBegun = addressed !== 'direct' && !of.isKept && rule.is !== 'open' && isListed(rule, message);
       if (isBegun && addressed === 'called') await registry.joinCellar(chat, chat);
-      return { message: await placed(message, of, of.present), handle };
+      return { message: await placed(message, of, left ?? of.present), handle };
     },
     move: async (chat, { does, cellar }) => {
       if (does === 'enter') await registry.joinCellar(chat, cellar);

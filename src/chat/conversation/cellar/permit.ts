@@ -49,8 +49,8 @@ function roleNeeded(handled: Handled, here: Here): Role {
   const { writes, errand, place, understood } = handled;
   const name = understood?.readings[0]?.command?.name;
   if (name !== undefined && KEEPERS_WORDS.has(name)) return 'keeper';
-  // Whoever wants to be forgotten is.
-  if (name === 'forget-me') return 'guest';
+  // Whoever wants to be forgotten is, and whoever wants to go goes.
+  if (name === 'forget-me' || name === 'leave') return 'guest';
   if (errand?.kind === 'import' || errand?.kind === 'backup') return 'keeper';
   // In a group another cellar is another one for all who are there.
   const isGroup = (here.message.addressed ?? 'direct') !== 'direct';

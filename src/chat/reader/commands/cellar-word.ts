@@ -7,7 +7,7 @@ import { textBehind } from './text-behind.ts';
 /** A name as it is written: each of its words with a capital. What the cellar is like has none. */
 const CAPITALS = /^\p{Lu}[^ ]*(?: (?:\p{Lu}|&|\d)[^ ]*)*$/u;
 
-/** Reads what is said of the cellar itself: `at Blanca`, `cellars`, `this cellar is Blanca`, `cellar name Blanca`. */
+/** Reads what is said of the cellar itself: `at Blanca`, `cellars`, `leave Blanca`, `this cellar is Blanca`, `cellar name Blanca`. */
 export function readCellarWord(talk: Talk): Command | undefined {
   const { board, said, isQuestion } = talk;
   if (board.findings.length > 0) return undefined;
@@ -20,6 +20,8 @@ export function readCellarWord(talk: Talk): Command | undefined {
   const text = textBehind(board, first);
   if (!isAName(text)) return undefined;
   if (isAt) return { name: 'at', cellar: text };
+  if (first.ids.includes('leave-cellar'))
+    return CAPITALS.test(text) ? { name: 'leave', cellar: text } : undefined;
   if (first.ids.includes('name-cellar')) return { name: 'name-cellar', as: text };
   return first.ids.includes('cellar-is') && CAPITALS.test(text)
     ? { name: 'name-cellar', as: text }

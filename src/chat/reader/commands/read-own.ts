@@ -46,7 +46,7 @@ const OPENERS: ReadonlySet<OwnWordId> = new Set([
   'order', 'orders', 'open', 'due', 'later', 'remind', 'not', 'unwatch', 'watch', 'settings', 'export', 'import', 'backup', 'forget',
   'forget-me', 'units', 'work-in', 'metric', 'us', 'imperial', 'usual', 'usual-bare', 'reds', 'whites', 'sweets', 'target', 'quiet', 'daily',
   'zone', 'we-are-in', 'allowance', 'basis', 'yield', 'replies', 'counts', 'every',
-  'picture', 'round', 'added-it', 'done', 'invite', 'keeper', 'hand', 'guest', 'people', 'remove', 'join', 'at-cellar', 'cellars', 'cellar-is', 'name-cellar',
+  'picture', 'round', 'added-it', 'done', 'invite', 'keeper', 'hand', 'guest', 'people', 'remove', 'join', 'at-cellar', 'cellars', 'cellar-is', 'name-cellar', 'leave-cellar',
   'read-along', 'only-called', 'language', 'law', 'limit', 'full-dose', 'yes',
   'stock', 'received', 'used-up', 'discarded', 'counted', 'in-store',
   'lab-range', 'lab-table', 'lab-molecular', 'lab-forecast', 'lab-blend', 'lab-too-much',

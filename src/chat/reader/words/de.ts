@@ -23,6 +23,7 @@ export const de: Words = {
     'unit:ton': ['tonne', 'tonnen'],
     'unit:quintal': ['dz', 'doppelzentner', 'dt', 'dezitonne'],
     'unit:ppm': ['teile pro million'],
+    'unit:g/hL': ['gramm pro hektoliter', 'gramm je hektoliter', 'gramm auf den hektoliter', 'g pro hektoliter', 'g je hektoliter', 'gramm pro hekto', 'gramm hektoliter'],
     'unit:degree': ['grad'],
     'unit:spoon': ['tl', 'teelöffel', 'teelöffeln', 'el', 'esslöffel', 'löffel', 'messerspitze', 'prise', 'prisen', 'gehäufter tl', 'gestrichener tl'],
     'unit:none-of-ours': ['minute', 'minuten', 'stunde', 'stunden', 'std', 'tag', 'tage', 'tagen', 'woche', 'wochen', 'monat', 'monate', 'monaten', 'jahr', 'jahre', 'jahren', 'sekunden', 'leute', 'personen', 'kisten', 'kiste', 'kartons', 'paletten', 'palette', 'bütten', 'bütte', 'fuhren', 'wagen', 'meter', 'mal', 'proben', 'punkte', 'hektar', 'uhr', 'hefe', 'kmw', 'bottiche voll', 'brix', 'klosterneuburger', 'euro', 'cent', 'säcke', 'sack', 'eimer', 'l h', 'l min', 'grad oe', 'grad öchsle'],

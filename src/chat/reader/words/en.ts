@@ -826,6 +826,7 @@ export const en: Words = {
     cellars: ['cellars', 'which cellar', 'which cellars', 'my cellars', 'our cellars', 'all cellars', 'list of cellars', 'which cellar is this', 'what cellar is this'],
     'cellar-is': ['this cellar is'],
     'name-cellar': ['cellar name', 'cellar name is', 'this cellar is called', 'this cellar is named', 'our cellar is called', 'the cellar is called', 'name this cellar', 'call this cellar', 'the name of this cellar is'],
+    'leave-cellar': ['leave', 'leave the cellar', 'leave cellar'],
     'read-along': ['read along', 'readalong', 'answer everything', 'read everything', 'read along here', 'read all messages'],
     'only-called': ['only when called', 'only when i call you', 'only when we call you', 'only when mentioned', 'only when spoken to', 'only if called', 'only if mentioned', 'stop reading along', "don't read along", 'dont read along', 'do not read along'],
     stock: [

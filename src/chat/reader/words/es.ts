@@ -366,6 +366,7 @@ export const es: Words = {
     cellars: ['bodegas', 'mis bodegas', 'que bodega', 'todas las bodegas'],
     'cellar-is': ['esta bodega es'],
     'name-cellar': ['nombre de la bodega', 'el nombre de la bodega es', 'esta bodega se llama', 'nuestra bodega se llama'],
+    'leave-cellar': ['salir de', 'salgo de', 'dejar', 'dejo'],
     'read-along': ['lee todo', 'leer todo', 'contesta a todo', 'responde a todo'],
     'only-called': ['solo cuando te llame', 'solo si te llamo', 'solo cuando te llamen', 'no leas todo'],
     'count-half': ['media'],

@@ -191,6 +191,7 @@ export const pt: Words = {
     'cue:oxygen': ['oxigénio', 'oxigénio dissolvido', 'o2', 'oxigénio total', 'oxigénio do espaço de cabeça', 'tpo', 'oxigênio', 'de oxigénio'],
     'cue:bottling-reserve': ['reserva para engarrafamento', 'reserva de engarrafamento'],
     'product:alcohol-free': ['vinho sem álcool', 'sem álcool', 'vinho desalcoolizado', 'desalcoolizado'],
+    'unit:g/hL': ['gramas por hectolitro', 'grama por hectolitro', 'gramas por hecto', 'grama por hecto', 'gramas o hecto', 'gramas ao hecto', 'gramas ao hectolitro', 'g por hecto', 'g por hectolitro', 'g ao hecto'],
   },
   neverMended: ['livro', 'livros', 'libra', 'metal', 'metro', 'metros', 'meta', 'curva', 'cubo', 'cura', 'tangue', 'sulfato', 'sulfureto', 'metabissulfato', 'barra', 'barras', 'barro', 'canto', 'banco', 'branca', 'tonal', 'pinto', 'lindo', 'doze', 'mosca', 'litoral', 'alto', 'salvo', 'calvo'],
   topics: {
@@ -367,6 +368,7 @@ export const pt: Words = {
     cellars: ['adegas', 'as minhas adegas', 'que adega', 'todas as adegas', 'em que adega', 'em que adega estamos'],
     'cellar-is': ['esta adega e'],
     'name-cellar': ['nome da adega', 'esta adega chama se', 'a nossa adega chama se'],
+    'leave-cellar': ['sair de', 'saio de', 'deixar', 'deixo'],
     'read-along': ['le tudo', 'ler tudo', 'responde a tudo'],
     'only-called': ['so quando te chamar', 'so se chamado', 'nao leias tudo'],
     'count-half': ['meia'],

@@ -70,7 +70,7 @@ export type OwnWordId =
   | 'sampled' | 'at' | 'on' | 'until' | 'moment-bar' | 'this-morning' | 'last-night' | 'part-of-day' | 'ago' | 'ago-before' | 'am'
   | 'pm' | 'oclock' | 'noon' | 'hour' | 'minute' | 'day' | 'week' | 'ordinal'
   | 'picture' | 'round' | 'weigh-sheet' | 'added-it' | 'done' | 'invite' | 'keeper' | 'hand' | 'guest' | 'as-role' | 'people' | 'remove' | 'make-role' | 'join' | 'at-cellar' | 'cellars'
-  | 'cellar-is' | 'name-cellar' | 'read-along' | 'only-called' | 'language'
+  | 'cellar-is' | 'name-cellar' | 'leave-cellar' | 'read-along' | 'only-called' | 'language'
   | 'stock' | 'in-store' | 'how-much' | 'received' | 'used-up' | 'discarded' | 'counted' | 'supplier' | 'for-equipment' | 'spoilt'
   | 'lab-aeration' | 'lab-iodine' | 'lab-naoh' | 'lab-iodate' | 'lab-titration' | 'lab-sample' | 'lab-titrant' | 'lab-blank' | 'lab-ascorbic' | 'lab-normal' | 'lab-molar'
   | 'lab-range' | 'lab-table' | 'lab-molecular' | 'lab-so2' | 'lab-forecast' | 'lab-blend' | 'lab-too-much'

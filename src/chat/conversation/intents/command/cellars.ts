@@ -1,6 +1,6 @@
 import type { CellarView } from '../../../../core/cellar/cellar-store.ts';
 import { cellarPart, placeOf } from '../../cellar/cellar-name.ts';
-import { fold } from '../../cellar/fold-name.ts';
+import { cellarsCalled } from '../../cellar/cellars-called.ts';
 import { keepingRoster } from '../../cellar/keeping-roster.ts';
 import type { Here } from '../../here.ts';
 import { line } from '../../lines/line.ts';
@@ -11,7 +11,7 @@ import { replying } from '../../replying.ts';
 export async function goTo(said: string | undefined, here: Here, view: CellarView): Promise<Handled> {
   const { cellar, cellars = [] } = here.message;
   if (said === undefined) return listCellars(cellars, here, view);
-  const found = cellars.filter(({ name, keeper }) => [name, keeper].some((one) => isCalled(one, said)));
+  const found = cellarsCalled(said, cellars);
   const [only, another] = found;
   if (only !== undefined && another === undefined) {
     const key = only.cellar === cellar ? 'at-already' : 'at-now';
@@ -19,6 +19,12 @@ export async function goTo(said: string | undefined, here: Here, view: CellarVie
     const place = { does: 'switch', cellar: only.cellar } as const;
     return { ...replying(here, { lines }), place };
   }
+  return notOne(said, found, here);
+}
+
+/** No cellar goes by a name, or several do. */
+export function notOne(said: string, found: readonly CellarPlace[], here: Here): Handled {
+  const { cellars = [] } = here.message;
   // Without a capital, and where there is but one cellar, it may be no name at all.
   if (cellars.length < 2 || (found.length === 0 && !/^\p{Lu}/u.test(said)))
     return replying(here, { lines: [line('first', 'chat-other')] });
@@ -27,18 +33,20 @@ export async function goTo(said: string | undefined, here: Here, view: CellarVie
   return replying(here, { lines: [{ ...line('first', key, { text: said }), list }] });
 }
 
-function isCalled(name: string | undefined, said: string): boolean {
-  return name !== undefined && fold(name) === fold(said);
-}
-
 async function listCellars(cellars: readonly CellarPlace[], here: Here, view: CellarView): Promise<Handled> {
-  const { cellar, title, isJoined } = here.message;
-  const own = { roster: here.roster, people: await view.people(), title: isJoined ? undefined : title };
-  const place = cellars.find((one) => one.cellar === cellar) ?? placeOf(cellar, own);
+  const { cellar } = here.message;
+  const place = await placeHere(here, view);
   const present = { ...line('first', 'at-here'), list: [cellarPart(place)] };
   const others = cellars.filter((one) => one.cellar !== cellar).map(cellarPart);
   if (others.length === 0) return replying(here, { lines: [present, line('effect', 'at-only')] });
   return replying(here, { lines: [present, { ...line('first', 'at-others'), list: others }] });
+}
+
+/** The cellar in which something was said. */
+export async function placeHere({ message, roster }: Here, view: CellarView): Promise<CellarPlace> {
+  const { cellar, cellars = [], title, isJoined } = message;
+  const own = { roster, people: await view.people(), title: isJoined ? undefined : title };
+  return cellars.find((one) => one.cellar === cellar) ?? placeOf(cellar, own);
 }
 
 /** Names the cellar. */

@@ -13,6 +13,7 @@ import { changeRole, listPeople } from './people.ts';
 import { drawPicture } from './picture.ts';
 import { daySheet, historySheet } from './sheets.ts';
 import { forgetPerson } from './forget-person.ts';
+import { leaveCellar } from './leave-cellar.ts';
 import { limitSheet } from './limit-sheet.ts';
 import { tellBlend } from '../../lab/blend.ts';
 import { tellForecast } from '../../lab/forecast.ts';
@@ -116,6 +117,8 @@ export async function answerCommand(
       return changeRole(command.who, command.role, here, view);
     case 'at':
       return goTo(command.cellar, here, view);
+    case 'leave':
+      return leaveCellar(command.cellar, here, view);
     case 'name-cellar':
       return nameCellar(command.as, here);
     case 'read-along':

@@ -6,7 +6,9 @@ import { line } from '../../lines/line.ts';
 import type { Outcome, Turn } from '../../outcome.ts';
 import { prepare } from '../../prepare.ts';
 import { notedOf } from '../../to-be-weighed.ts';
-import { additiveOf, toAddedRequest } from '../../to-requests.ts';
+import { underLines } from '../../lines/warnings.ts';
+import { addedRequestOf } from '../../added-request-of.ts';
+import { additiveOf } from '../../to-requests.ts';
 import { vesselsIn } from '../../vessels-named.ts';
 import { finishReading } from '../../../reader/finish-reading.ts';
 import { notedOrder } from '../noted-order.ts';
@@ -23,7 +25,7 @@ export function answerOrder(reading: Reading, turn: Turn): Outcome {
     return { answer: null, inRound: [first], lines: [first, line('effect', 'order-how')], buttons: [] };
   }
   const additive = additiveOf(whole);
-  const { steps: _steps, ...amount } = added(toAddedRequest(whole));
+  const { steps: _steps, warnings, limit: _limit, total_after_mg_L: _after, ...amount } = added(addedRequestOf(whole, here)); // prettier-ignore
   const volume_L = whole.fields.volume_L;
   const happening: Order = {
     kind: 'order',
@@ -35,5 +37,13 @@ export function answerOrder(reading: Reading, turn: Turn): Outcome {
     ...(reading.remark !== undefined && { remark: reading.remark }),
   };
   const noted = notedOrder({ happening, at: here.message.at }, turn);
-  return { ...noted, lines: [...noted.lines, ...assumedLines(whole, turn.manner)] };
+  return {
+    ...noted,
+    lines: [
+      ...noted.lines.slice(0, 1),
+      ...underLines(warnings, turn.manner),
+      ...noted.lines.slice(1),
+      ...assumedLines(whole, turn.manner),
+    ],
+  };
 }

@@ -4,7 +4,7 @@ import type { Line } from '../../../replies/reply.ts';
 import { keepingRoster } from '../../cellar/keeping-roster.ts';
 import { peopleCalled } from '../../cellar/people-called.ts';
 import { keepersOf, rolesOf } from '../../cellar/role-of.ts';
-import type { Roster } from '../../cellar/roster.ts';
+import { withoutChatsOf } from '../../cellar/without-chats-of.ts';
 import type { Here } from '../../here.ts';
 import { line, part } from '../../lines/line.ts';
 import { nameText } from '../../people.ts';
@@ -15,7 +15,7 @@ import { replying } from '../../replying.ts';
 const MOST_LINES = 40;
 
 /** Everybody in the cellar, who writes included, with what they may do. */
-async function everybody(here: Here, view: CellarView): Promise<readonly Person[]> {
+export async function everybody(here: Here, view: CellarView): Promise<readonly Person[]> {
   const people = await view.people();
   const { name } = here.message;
   const me = { number: here.me, ...(name !== undefined && { name }) };
@@ -75,16 +75,6 @@ export async function changeRole(
   const roles = { ...roster.roles, [person.number]: to };
   const next = to === 'none' ? withoutChatsOf(person.number, roster) : roster;
   return { ...said, writes: [keepingRoster({ ...next, roles }), ...writes] };
-}
-
-/** Nothing comes into the private chat of somebody who was removed. */
-function withoutChatsOf(person: number, roster: Roster): Roster {
-  const others = ([chat]: readonly [string, unknown]): boolean => roster.owners[chat] !== person;
-  return {
-    ...roster,
-    chats: Object.fromEntries(Object.entries(roster.chats).filter(others)),
-    owners: Object.fromEntries(Object.entries(roster.owners).filter(others)),
-  };
 }
 
 /** Without a capital it may be no name at all: then it was talk. */
