@@ -113,9 +113,9 @@ refused-ammonium-must =
        *[said] Ist es Most? Dann schreib alles neu, mit dem Wort Most.
     }
 dose-nothing = { at }nichts zuzugeben.
-dose-rate = { at }{ $dose } SO2 fehlen, das sind { measured } auf { $per }
+dose-rate = { at }{ $dose } SO2 fehlen, das sind { measured } pro { $per }
 dose-rate-bare = { at }{ $dose } SO2 fehlen
-dose-need = { at }bei pH { $ph } braucht { $molecular } molekular { $free } frei
+dose-need = { at }für { $molecular } molekular braucht es bei pH { $ph } { $free } frei
 dose-now = { at }jetzt { $molecular } molekular (pH { $ph }, { $free } frei)
 
 ## The law
@@ -353,7 +353,7 @@ designation-asked =
 
 ## The first line: a choice and not a dose
 
-choice-head = { at }eine Wahl, keine Dosis: bei pH { $ph } braucht { $target } molekular { $free } frei.
+choice-head = { at }eine Wahl, keine Dosis: bei pH { $ph } braucht es für { $target } molekular { $free } frei.
 choice-leave = { $mark } So lassen: { $free } frei ist { $molecular } molekular.
 choice-to =
     { $total ->
@@ -363,11 +363,11 @@ choice-to =
 choice-no-amount = – Auf { $free } ({ $molecular } molekular): keine Menge: gesamt ginge über { $limit } ({ law-of }).
 choice-red =
     { $kind ->
-        [none] Ist es Rotwein, braucht { $red } { $free } frei: nichts zuzugeben.
-        [over] Ist es Rotwein, braucht { $red } { $free } frei: keine Menge, gesamt ginge über { $limit } ({ law-of }).
-       *[other] Ist es Rotwein, braucht { $red } { $free } frei: { bare-amount }.
+        [none] Ist es Rotwein ({ $red } molekular), reichen { $free } frei: nichts zuzugeben.
+        [over] Ist es Rotwein ({ $red } molekular), reichen { $free } frei: keine Menge, gesamt ginge über { $limit } ({ law-of }).
+       *[other] Ist es Rotwein ({ $red } molekular), reichen { $free } frei: { bare-amount }.
     }
-ways-out = Oder: kühler, sauberer, öfter prüfen; Säure für einen tieferen pH: frag jemanden vom Fach.
+ways-out = Oder: kühler, sauberer, öfter prüfen; Säure für tieferen pH: frag Fachleute.
 
 ## The stage
 
@@ -411,12 +411,12 @@ stage-word =
 
 ## What it does
 
-effect-land = { $after } { $unit } frei, wenn nichts bindet; rechne mit { $range }, denn meist bindet ein Drittel bis die Hälfte; morgen messen.
-effect-land-molecular = Von { $molecularNow } auf { $molecular } molekular: { $after } { $unit } frei, wenn nichts bindet; rechne mit { $range }, denn meist bindet ein Drittel bis die Hälfte; morgen messen.
-effect-land-to-molecular = Auf { $molecular } molekular: { $after } { $unit } frei, wenn nichts bindet; rechne mit { $range }, denn meist bindet ein Drittel bis die Hälfte; morgen messen.
-effect-land-low = { $after } { $unit } frei, wenn nichts bindet; unter 10 frei kann viel oder alles binden: rechne mit { $range }, miss, bevor du nochmal zugibst.
+effect-land = { $after } { $unit } frei, wenn nichts bindet; eher { $range } (meist bindet ein Drittel bis die Hälfte); morgen messen.
+effect-land-molecular = Von { $molecularNow } auf { $molecular } molekular: { $after } { $unit } frei, wenn nichts bindet; eher { $range } (meist bindet ein Drittel bis die Hälfte); morgen messen.
+effect-land-to-molecular = Auf { $molecular } molekular: { $after } { $unit } frei, wenn nichts bindet; eher { $range } (meist bindet ein Drittel bis die Hälfte); morgen messen.
+effect-land-low = { $after } { $unit } frei, wenn nichts bindet; unter 10 frei kann viel oder alles binden: eher { $range }, miss, bevor du nochmal zugibst.
 effect-land-small = Höchstens { $after } { $unit } frei: der Anstieg ist kleiner als der Messfehler.
-effect-rise = Frei steigt um etwa { $range } { $unit }, denn meist bindet ein Drittel bis die Hälfte; morgen messen.
+effect-rise = Frei steigt um etwa { $range } { $unit } (meist bindet ein Drittel bis die Hälfte); morgen messen.
 effect-must = Das meiste bindet während der Gärung: den Wein schützt es später nicht.
 must-comes-back = Etwa ein Drittel ist später als gesamte SO2 wieder da: + { $total } { $unit } (deutscher Fachtext, 2012).
 must-yeast = Hefe { $least } bis { $most } Stunden danach (üblich, ohne Quelle).
@@ -602,8 +602,8 @@ assumed-barrels =
     }
 note-free-unlabelled = „{ $text }“ ist freie SO2
 note-ph-unlabelled = „{ $text }“ ist der pH
-note-round-ph = eine Kommazahl allein ist der pH
-note-round-free = eine Zahl allein ist freie SO2
+note-round-ph = Kommazahl allein ist der pH
+note-round-free = Zahl allein ist freie SO2
 note-volume-sum = „{ $text }“ zusammengezählt
 note-strength-as-salt = die Stärke ist Gramm Salz in 100 mL; als SO2 wäre sie { $factor }-mal so stark
 note-strength-as-SO2 = die Stärke ist Gramm SO2 in 100 mL
@@ -666,7 +666,7 @@ target-of =
 
 ## What cannot be answered as it stands
 
-problem-ph-out-of-range = { at }„{ $about }“ kann kein pH von Wein sein: ich nehme 2,5 bis 4,8. Komma vergessen? Schreib: pH 3,58
+problem-ph-out-of-range = { at }„{ $about }“ kann kein Wein-pH sein (2,5 bis 4,8). Komma vergessen? Schreib: pH 3,58
 problem-negative-value = { at }„{ $about }“ liegt unter null, das geht nicht. Schick die Zahl noch einmal ohne Minus.
 problem-total-below-free = { at }gesamt liegt unter frei („{ $about }“). Vertauscht? Schreib: frei { $one } gesamt { $two }
 problem-volume-not-positive = { at }ein Volumen „{ $about }“ gibt es nicht. Schreib: 55 hl
@@ -825,10 +825,10 @@ caution-no-acid-no-chlorine = Nie mit Säure oder Chlorreiniger.
 caution-no-other-acid-no-chlorine = Keine andere Säure, kein Chlorreiniger.
 caution-asthma = Nicht für Asthmatiker.
 caution-crush-first = Zerdrücken, in wenig Wein oder Wasser lösen.
-caution-dissolve-first = Erst in wenig Wein oder Wasser lösen.
+caution-dissolve-first = Erst in etwas Wein oder Wasser lösen.
 caution-foams-with-carbon-dioxide = Wein voller CO2 schäumt über.
 caution-mix-and-measure-again = Mischen, nach einem Tag messen.
-caution-label-and-rules-first = Etikett, örtliche Regeln und Fachleute gehen vor.
+caution-label-and-rules-first = Etikett, Vorschriften, Fachleute gehen vor.
 cautions-of = ⚠ { additive }: { $list }
 cautions-short = ⚠ Vorsicht wie vorhin: Knopf Sicherheit.
 
@@ -1157,13 +1157,13 @@ round-red = „Wenn rot“ gilt für { $red } molekular.
 round-stock = Als Lösung davon mit { $strength } %: { $list }.
 round-rest = Der Rest als Lösung mit { $strength } %: { $list }.
 round-stock-of = { $vessel } { $amount }
-mixed-sample = Das gilt fürs Mittel der { $count }: eine Mischprobe zeigt das niedrigste nicht. Wie weit sie auseinanderliegen, weiß ich nicht; liegt eins 5 tiefer, landet es 5 tiefer. Miss einige einzeln, bevor du alle dosierst (üblich, ohne Quelle).
+mixed-sample = Das gilt fürs Mittel der { $count }: eine Mischprobe zeigt das niedrigste nicht. Liegt eins 5 tiefer, landet es 5 tiefer. Wie weit sie abweichen, weiß ich nicht: erst einige einzeln messen (üblich, ohne Quelle).
 round-mixed = ⚠ Eine Mischprobe zeigt das Mittel, nicht das niedrigste: { $list }. Miss einige einzeln.
 round-low = ⚠ Unter 10 frei kann viel oder alles binden: { $list }. Dort messen, bevor du nochmal zugibst.
 round-name = { $name }
-round-again = Schick jede Zeile, die nicht lesbar war, noch einmal ganz.
+round-again = Unlesbare Zeilen noch einmal ganz schicken.
 round-total =
-    Insgesamt { $list }: die { $count } gerundeten Mengen zusammengezählt.
+    Insgesamt { $list } ({ $count } gerundete Mengen).
 round-total-of =
     { $kind ->
         [tablet] { $amount } Brausetabletten zu { $size } g SO2
@@ -1193,7 +1193,7 @@ button-round-line =
 button-round-next = Weiter
 button-round-picture = Blatt als Bild
 button-round-file = Blatt als Datei
-button-round-undo = { $entries } rückgängig
+button-round-undo = Rückgängig { $entries }
 round-noted =
     Eingetragen { $entries }: { $count ->
         [one] eine Zugabe
@@ -1247,7 +1247,7 @@ round-not-understood =
        *[other] „{ $about }“ konnte ich nicht lesen.
     }
 round-effect-short = Meist bindet ein Drittel bis die Hälfte: morgen messen.
-round-effect = Von einer Gabe bindet meist ein Drittel bis die Hälfte: morgen messen. Den Rechenweg gibt es, wenn du eine Zeile allein schickst.
+round-effect = Meist bindet ein Drittel bis die Hälfte: morgen messen. Rechenweg: Zeile allein schicken.
 choice-additive = { $value ->
         [potassium-metabisulfite] Kaliumdisulfit (E 224)
         [sodium-metabisulfite] Natriumdisulfit (E 223)
@@ -1328,9 +1328,11 @@ import-no-file = Eine Datei „{ $file }“ kann ich nicht lesen.
 export-written = Geschrieben: { $path }
 export-none = In dieser Zeit wurde nichts eingetragen.
 backup-written = Sicherung geschrieben: { $path }
+progress-working = Ich bin dran …
+progress-done = Erledigt.
 errand-failed = Das hat nicht geklappt, nichts wurde geschrieben. Bitte versuch es noch einmal; klappt es wieder nicht, sag dem Bescheid, der mich betreibt.
 backup-elsewhere = Sicherungen macht, wer mich betreibt. Das Kellerbuch nimmst du so mit: Export alles
-button-undo = { $entry } rückgängig
+button-undo = Rückgängig { $entry }
 button-done = Auftrag { $entry } erledigt
 button-remind = Erinnere mich in 24 h
 added-confirm = { at }{ $added } sind { $list }. Eintragen?
@@ -1946,7 +1948,7 @@ picture-last = { $list }.
 picture-last-free = frei { $value } { $unit } ({ $day })
 picture-last-total = gesamt { $value } { $unit } ({ $day })
 picture-last-bound = gebunden { $value } { $unit } ({ $day })
-picture-needs = pH { $ph } ({ $day }): { $molecular } molekular braucht { $needed } frei.
+picture-needs = pH { $ph } ({ $day }): für { $molecular } molekular braucht es { $needed } frei.
 picture-needs-nothing =
     { $why ->
         [no-ph] pH gerade unbekannt, also auch die nötige freie SO2.
