@@ -231,22 +231,22 @@ law-unknown =
     }
 dose-capped-kept =
     { $reserve ->
-        [none] Tengo { $kept } { $unit } sotto il limite: una misura ({ $of ->
+        [none] Tengo { $kept } { $unit } sotto il limite: la { $of ->
             [free] libera
            *[total] totale
-        }) può sbagliare di tanto. Il tuo obiettivo lo passerebbe.
-       *[some] Tengo { $kept } { $unit } sotto il limite: { $error } perché una misura ({ $of ->
+        } misurata può sbagliare di tanto. Il tuo obiettivo lo passerebbe.
+       *[some] Tengo { $kept } { $unit } sotto il limite: { $error } perché la { $of ->
             [free] libera
            *[total] totale
-        }) può sbagliare di tanto, { $reserve } per l’imbottigliamento. Il tuo obiettivo lo passerebbe.
+        } misurata può sbagliare di tanto, { $reserve } per l’imbottigliamento. Il tuo obiettivo lo passerebbe.
     }
 full-dose-asks =
     { $of ->
-        [free] { at }la libera potrebbe arrivare a { $after }, oltre il limite di { $limit } { $unit } di libera ({ rule-short }). Vuoi lo stesso le cifre?
+        [free] { at }la libera potrebbe arrivare a { $after }, oltre il limite di { $limit } { $unit } di libera ({ rule-short }). Vuoi le cifre lo stesso?
        *[total] { at }la totale sarebbe { $least ->
             [yes] almeno{" "}
            *[no] {""}
-        }{ $after }, oltre il limite di { $limit } { $unit } ({ rule-short }). Vuoi lo stesso le cifre?
+        }{ $after }, oltre il limite di { $limit } { $unit } ({ rule-short }). Vuoi le cifre lo stesso?
     }
 full-dose-care = Per quella legge il vino così non si può vendere. Nel registro resta che si sapeva. Non è un parere legale: verifica per il tuo mercato.
 full-dose-left = Va bene: resta la dose più piccola.
@@ -610,7 +610,7 @@ note-strength-as-salt = il titolo è in grammi di sale in 100 mL; in SO2 sarebbe
 note-strength-as-SO2 = il titolo è in grammi di SO2 in 100 mL
 note-mass-beside-readings = “{ $text }” sono grammi, non galloni
 note-each-or-total = “{ $text }” è di ciascuna
-note-unread-words = Parole che non conosco, saltate: { $text }
+note-unread-words = parole che non conosco, saltate: { $text }
 set-aside-figure = { $text }
 
 ## L’unica domanda
@@ -675,9 +675,9 @@ problem-unit-mismatch = { at }l’unità non va bene in “{ $about }”. La SO2
 problem-ambiguous-number =
     { $kind ->
         [split] { at }c’è uno spazio in “{ $about }”. Scrivi: pH { $one }
-        [volume] { at }“{ $about }” può sbagliare di mille volte. Scrivi: { $one }, oppure: { $two }
-        [mass] { at }“{ $about }” può sbagliare di mille volte. Scrivi: { $one }, oppure: { $two }
-        [thousands] { at }“{ $about }” può sbagliare di mille volte. Scrivi: { $one }, oppure: { $two }
+        [volume] { at }“{ $about }”: virgola o migliaia? Scrivi: { $one }, oppure: { $two }
+        [mass] { at }“{ $about }”: virgola o migliaia? Scrivi: { $one }, oppure: { $two }
+        [thousands] { at }“{ $about }”: virgola o migliaia? Scrivi: { $one }, oppure: { $two }
         [powder] { at }“{ $about }”: di SO2 o di polvere? Scrivi: aggiungere { $one } ppm SO2, oppure: { $two } g ogni 10 L { $named }
         [salt] { at }“{ $about }”: di SO2 o di sale? Come SO2 è più forte di quanto si venda. Se in etichetta c’è sale, scrivi: { salt-name } sale { $one }%
         [water] { at }“{ $about }”: SO2 in acqua o soluzione di metabisolfito? Scrivi: acqua solforosa { $one }%, oppure: soluzione di meta { $one }%
@@ -1196,13 +1196,13 @@ button-round-picture = Foglio come immagine
 button-round-file = Foglio come file
 button-round-undo = Annulla { $entries }
 round-noted =
-    Annotate { $entries }: { $count ->
+    Annotato, voci { $entries }: { $count ->
         [one] un’aggiunta
        *[other] { $count } aggiunte
     }, { $list }, { $when }.
 round-noted-rest = il resto del giro
-round-noted-line = Annotata { $entry }: { $vessel } { $list }, { $when }.
-round-noted-each = Annotata { $entry }: { $vessel } { $list } ciascuna, { $when }.
+round-noted-line = Annotato, voce { $entry }: { $vessel } { $list }, { $when }.
+round-noted-each = Annotato, voce { $entry }: { $vessel } { $list } ciascuna, { $when }.
 round-noted-before = Già annotate prima, lasciate: { $list }.
 round-noted-none = Già tutto annotato prima: voci { $entries }.
 round-not-noted = Non annotate, perché non hanno una quantità unica: { $list }.
@@ -1309,7 +1309,7 @@ read-kept =
        *[known] Letto e annotato: { $list }.
     }
 noted-something-else =
-    Annotata { $entry }, non calcolata: { $vessel } { $text }, { $when }.{ $voids ->
+    Annotato, voce { $entry }, non calcolata: { $vessel } { $text }, { $when }.{ $voids ->
         [ph] { " " }Il pH va rimisurato.
        *[none] { "" }
     }
@@ -1329,6 +1329,8 @@ import-no-file = Non trovo un file “{ $file }” da leggere.
 export-written = Scritto: { $path }
 export-none = In quel periodo non si è annotato niente.
 backup-written = Backup scritto: { $path }
+progress-working = Ci sto lavorando …
+progress-done = Fatto.
 errand-failed = Non è riuscito, e niente è stato scritto. Riprova; se fallisce ancora, dillo a chi mi gestisce.
 backup-elsewhere = I backup li fa chi mi gestisce. Il registro di questa cantina lo porti via con: esporta tutto
 button-undo = Annulla { $entry }
@@ -1337,14 +1339,14 @@ button-remind = Ricordamelo tra 24 h
 added-confirm = { at }{ $added } sono { $list }. Annoto?
 added-confirm-bare = { at }{ $added } di SO2. Annoto?
 noted-addition =
-    Annotata { $entry }: { $vessel } { $list }, { $when }{ $added ->
+    Annotato, voce { $entry }: { $vessel } { $list }, { $when }{ $added ->
         [none] .
        *[other] { " " }({ $added } di SO2).
     }{ $order ->
         [none] { "" }
        *[other] { " " }L’ordine { $order } è fatto.
     }
-noted-bare = Annotata { $entry }: { $vessel } { $added } di SO2, { $when }.
+noted-bare = Annotato, voce { $entry }: { $vessel } { $added } di SO2, { $when }.
 noted-measure = Misura la libera dopo: { $when }, prima di aggiungere ancora.
 noted-measure-now = Misura la libera prima di aggiungere ancora.
 already-noted = Già annotata come { $entry }, { $when } ({ $who ->
@@ -1377,29 +1379,29 @@ dosed-who =
        *[other] di { $who }
     }
 dosed-which-first =
-    { $vessel }: aggiunta { dosed-who } { $known ->
-        [none] già fatta
-       *[some] ({ $list })
+    { $vessel }: aggiunta { dosed-who }{ $known ->
+        [none] { "" }
+       *[some] , { $list }
     }, { $when }. Campione preso prima? Nessuna dose finché non lo so.
 dosed-add-more =
-    { $vessel }: aggiunta { dosed-who } { $known ->
-        [none] già fatta
-       *[some] ({ $list })
+    { $vessel }: aggiunta { dosed-who }{ $known ->
+        [none] { "" }
+       *[some] , { $list }
     }, { $when }. Ancora, lo stesso?
 dosed-sampled-before =
-    { $vessel }: nessuna dose: aggiunta { dosed-who } { $known ->
-        [none] già fatta
-       *[some] ({ $list })
+    { $vessel }: nessuna dose: aggiunta { dosed-who }{ $known ->
+        [none] { "" }
+       *[some] , { $list }
     }, { $when }, dopo quel campione. Rimisura dopo: { $next }.
 dosed-landed =
-    { $vessel }: per ora basta: aggiunta { dosed-who } { $known ->
-        [none] già fatta
-       *[some] ({ $list })
+    { $vessel }: per ora basta: aggiunta { dosed-who }{ $known ->
+        [none] { "" }
+       *[some] , { $list }
     }, { $when }, e la SO2 si combina ancora per un giorno. Rimisura dopo: { $next }.
 dosed-in-round =
-    { $vessel }: nessuna dose: aggiunta { dosed-who } { $known ->
-        [none] già fatta
-       *[some] ({ $list })
+    { $vessel }: nessuna dose: aggiunta { dosed-who }{ $known ->
+        [none] { "" }
+       *[some] , { $list }
     }, { $when }. Mandala da sola.
 landed =
     { $vessel } è arrivata a { $after }{ $planned ->
@@ -1433,10 +1435,10 @@ strike-none = La voce { $entry } non c’è.
 strike-again = La voce { $entry } è già stata cancellata, da { $by }.
 strike-correction = La voce { $entry } è già una correzione. Annota di nuovo quello che era giusto.
 strike-why = Perché? Scrivi: cancella { $entry } refuso
-struck = Cancellata { $entry } ({ $list }). Nel foglio restano tutte e due.
+struck = Cancellata la voce { $entry } ({ $list }). Nel foglio restano tutte e due.
 struck-addition = Se invece è entrata, annotala di nuovo.
 noted-vessel =
-    Annotata { $entry }: { $list }.{ $voids ->
+    Annotato, voce { $entry }: { $list }.{ $voids ->
         [ph] { " " }Il pH va rimisurato.
         [volume] { " " }Il nuovo volume dillo con la prossima analisi.
         [blend] { " " }pH e SO2 vanno rimisurati.
@@ -1777,6 +1779,7 @@ at-others = Altre: { $list }. Per cambiare scrivi “a” e il nome
 at-only = Qui non ce n’è un’altra.
 at-unknown = Qui non conosco una cantina “{ $text }”. Ci sono: { $list }.
 at-which = Quale “{ $text }”? { $list }.
+cellar-left = Non sei più in { $list }. Quello che hai annotato resta nel suo registro.
 cellar-named = Questa cantina ora è { $name }.
 reads-along =
     { $on ->
@@ -2092,7 +2095,7 @@ stock-oldest-lot =
     }
 stock-lot-unknown = Il lotto { $lot } per il registro non è in magazzino: preso dal più vecchio.
 stock-noted =
-    Annotata { $entry }: { $event ->
+    Annotato, voce { $entry }: { $event ->
         [received] ricevuto,
         [used] usato,
         [discarded] buttato,
