@@ -29,7 +29,8 @@ export function limitWarnings(
   const warnings: Warning[] = reachedAfter(room, dose_mg_L).flatMap((one) =>
     standingWarnings(one, room, facts),
   );
-  if (none !== undefined)
+  // A limit is of the finished wine: that there is none of must is no gap of the file.
+  if (none !== undefined && none.product !== 'must')
     warnings.push({
       code: 'no-limit-on-file',
       values: { none_for: none.product, region: none.region, reason: none.reason },

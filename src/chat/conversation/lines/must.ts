@@ -1,6 +1,11 @@
 import type { DoseAnswer } from '../../../core/dose/answer.ts';
 import { afterMust } from '../../../core/dose/after-must.ts';
-import { MUST_RANGES, mustRangesFor, type MustRange } from '../../../core/dose/must-ranges.ts';
+import {
+  MUST_RANGES,
+  mustRangesFor,
+  type FruitState,
+  type MustRange,
+} from '../../../core/dose/must-ranges.ts';
 import { SOURCES } from '../../../core/sources.ts';
 import type { Reading } from '../../reader/understood.ts';
 import { concentrationText } from '../../replies/quantity-text.ts';
@@ -32,7 +37,7 @@ export function mustRangeLines({ fields, marks }: Reading, manner: Manner): Line
   const ranges =
     state === undefined
       ? MUST_RANGES.filter(({ style }) => [undefined, fields.style ?? style].includes(style))
-      : mustRangesFor(state, fields.style);
+      : inState(state, fields.style);
   const sources = [...new Set(ranges.map(({ source }) => source))];
   return sources.map((source) => ({
     ...line('effect', 'must-published', {
@@ -41,6 +46,12 @@ export function mustRangeLines({ fields, marks }: Reading, manner: Manner): Line
     }),
     list: ranges.filter((one) => one.source === source).map((one) => rangePart(one, manner)),
   }));
+}
+
+/** Of fruit in that state; where none was published for its colour, that of another, which the line names. */
+function inState(state: FruitState, style: string | undefined): readonly MustRange[] {
+  const own = mustRangesFor(state, style);
+  return own.length > 0 ? own : mustRangesFor(state);
 }
 
 /** What an addition to must does not do, what comes back of it, and when the yeast goes in. */
