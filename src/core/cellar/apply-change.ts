@@ -24,7 +24,7 @@ export function applyChange(before: Vessel, change: Entry & VesselChange): Vesse
     case 'told':
       return told(before, change);
     case 'racked': {
-      const racked = { ...before, handled_at: at };
+      const racked = { ...before, handled: { at, entry } };
       return volume_L === undefined
         ? withoutVolume(racked, { event, at })
         : withVolume(racked, known(volume_L));

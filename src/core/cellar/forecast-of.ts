@@ -2,7 +2,7 @@ import type { FreePoint } from '../forecast/decline.ts';
 import { forecast, type Forecast } from '../forecast/forecast.ts';
 import type { Container } from '../forecast/published-rates.ts';
 import { isBarrel } from './is-barrel.ts';
-import type { Vessel } from './vessel.ts';
+import type { Happened, Vessel } from './vessel.ts';
 
 /**
  * The readings of free SO2 (mg/L) that show how this wine loses it: since its last addition, since it was racked or
@@ -16,16 +16,22 @@ import type { Vessel } from './vessel.ts';
  * const tank = { ...freshVessel('tank 4', { entry: 1, at: 0 }), readings: [{ entry: 1, at: 0, free_mg_L: 30 }, { entry: 3, at: 9, free_mg_L: 28 }] };
  * freePoints(tank).length // => 2
  * freePoints({ ...tank, additions: [{ entry: 2, at: 5, by: 1 }] }).length // => 1
- * freePoints({ ...tank, handled_at: 5 }).length // => 1
+ * freePoints({ ...tank, handled: { entry: 2, at: 5 } }).length // => 1
+ * freePoints({ ...tank, additions: [{ entry: 2, at: 0, by: 1 }] }).length // => 1
  * ```
  */
 export function freePoints({ readings, additions, ...vessel }: Vessel): readonly FreePoint[] {
-  const { changed_at = -Infinity, handled_at = -Infinity } = vessel;
-  const since = Math.max(changed_at, handled_at, ...additions.map(({ at }) => at));
-  return readings.flatMap(({ at, free_mg_L }) =>
-    free_mg_L === undefined || at < since ? [] : [{ at, free_mg_L }],
+  const events = [vessel.changed, vessel.handled, ...additions].filter((one) => one !== undefined);
+  return readings.flatMap(({ at, entry, free_mg_L }) =>
+    free_mg_L === undefined || events.some((event) => isBefore({ at, entry }, event))
+      ? []
+      : [{ at, free_mg_L }],
   );
 }
+
+/** In time, and within a minute in the order in which it was told. */
+const isBefore = (one: Happened, other: Happened): boolean =>
+  one.at < other.at || (one.at === other.at && one.entry < other.entry);
 
 /**
  * Where the wine of a vessel lies: in a barrel by its name, in bottles by its stage, else in a tank.

@@ -84,8 +84,8 @@ export function pour(
 function left(from: Vessel, { at, entry, volume_L }: Entry & VesselChange): Vessel {
   if (volume_L === undefined) return emptied(from, at);
   const rest = from.volume_L === undefined ? undefined : from.volume_L.value - volume_L;
-  if (rest === undefined) return { ...from, handled_at: at };
-  const opened = { ...from, handled_at: at };
+  if (rest === undefined) return { ...from, handled: { at, entry } };
+  const opened = { ...from, handled: { at, entry } };
   if (rest > 0) return withVolume(opened, { value: rest, at, entry });
   return withoutVolume(opened, { event: 'moved', at });
 }
@@ -97,7 +97,7 @@ function filled(from: Vessel, to: Vessel, { at, entry, volume_L }: Entry & Vesse
   const arrived: Vessel = {
     ...wine,
     vessel: to.vessel,
-    handled_at: at,
+    handled: { at, entry },
     since,
     last_at: to.last_at,
     last_entry: to.last_entry,
@@ -127,7 +127,7 @@ function blended(from: Vessel, to: Vessel, { at, entry, volume_L }: Entry & Vess
     unlanded: [],
     added_since_total_mg_L: 0,
     landings: [],
-    changed_at: at,
+    changed: { at, entry },
     ...(bound_before && { bound_before }),
   };
   const unmeasured = withoutPH(mixed, 'blended', at);

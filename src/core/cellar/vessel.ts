@@ -9,6 +9,12 @@ export interface Known<T> {
   readonly entry: number;
 }
 
+/** The moment of an event, and its entry: of what is told of the same minute the entries say which came first. */
+export interface Happened {
+  readonly at: number;
+  readonly entry: number;
+}
+
 /** Facts about the wine that stay until another is told or an event makes them void. */
 export type KnownTraits = { readonly [K in keyof WineTraits]?: Known<NonNullable<WineTraits[K]>> };
 
@@ -95,9 +101,9 @@ export interface Vessel {
   /** What the wines bound that it was mixed of, by volume. */
   readonly bound_before?: Learned;
   /** When the wine became another for the last time: it was blended, or fermented, or went through malolactic. */
-  readonly changed_at?: number;
+  readonly changed?: Happened;
   /** When it was racked, moved or partly taken for the last time: air came to it, and it may lie otherwise than before. */
-  readonly handled_at?: number;
+  readonly handled?: Happened;
   readonly orders: readonly OpenOrder[];
   readonly later?: number;
   readonly unwatched?: true;

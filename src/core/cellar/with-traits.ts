@@ -1,7 +1,7 @@
 import type { Stage } from '../wine.ts';
 import type { Entry, WineTraits } from './entry.ts';
 import { TRAIT_NAMES } from './trait-names.ts';
-import type { Known, KnownTraits, Vessel } from './vessel.ts';
+import type { Happened, Known, KnownTraits, Vessel } from './vessel.ts';
 
 /**
  * A vessel with what was told of its wine: alcohol in % vol, sugar in g/L. Wine that goes into malolactic or comes out
@@ -26,16 +26,16 @@ export function withTraits(vessel: Vessel, told: WineTraits, { at, entry }: Entr
   const changed = { ...vessel, traits };
   const before = vessel.traits.stage?.value;
   if (isFermented(before, told.stage))
-    return withoutPH({ ...asNewWine(changed, at), unlanded: [] }, 'fermentation', at);
+    return withoutPH({ ...asNewWine(changed, { at, entry }), unlanded: [] }, 'fermentation', at);
   const isMalolactic = told.stage !== undefined && told.stage !== before;
   if (!isMalolactic || (before !== 'malolactic' && told.stage !== 'malolactic')) return changed;
-  return withoutPH(asNewWine(changed, at), 'malolactic', at);
+  return withoutPH(asNewWine(changed, { at, entry }), 'malolactic', at);
 }
 
 /** A wine that binds otherwise than before: what was learned of it holds no longer. */
-function asNewWine(vessel: Vessel, at: number): Vessel {
+function asNewWine(vessel: Vessel, changed: Happened): Vessel {
   const { bound_before: _bound, ...others } = vessel;
-  return { ...others, landings: [], changed_at: at };
+  return { ...others, landings: [], changed };
 }
 
 /** Whether what was must is wine now: its pH is another, and what went into the must has bound. */

@@ -22,8 +22,6 @@ const MOMENTS: readonly string[] = [
   'last_at',
   'added_at',
   'before_at',
-  'changed_at',
-  'handled_at',
   'empty',
   'later',
 ];

@@ -128,3 +128,24 @@ test('a reading of weeks before the addition, and one of almost no free SO2, tea
     9,
   );
 });
+
+test('of a reading and an addition of the same minute, the one that was told first came first', () => {
+  const atOnce = (...happenings: readonly Happening[]): Vessel => {
+    const vessels = new Map<string, Vessel>();
+    for (const [i, happening] of happenings.entries())
+      for (const [name, vessel] of applyEntry(vessels, {
+        ...happening,
+        entry: i + 1,
+        key: `k${i}`,
+        at: 0,
+        noted_at: 0,
+        by: 1,
+      }))
+        if (vessel !== undefined) vessels.set(name, vessel);
+    return vessels.get('T4') as Vessel;
+  };
+  expect(freePoints(atOnce(read('T4', 12), add('T4', 25))).length).toBe(0);
+  expect(freePoints(atOnce(add('T4', 25), read('T4', 28))).length).toBe(1);
+  const blended: Happening = { kind: 'vessel', event: 'blended', vessels: ['T7'], to: 'T4' };
+  expect(freePoints(atOnce(read('T4', 22), read('T7', 30), blended)).length).toBe(0);
+});
