@@ -255,7 +255,7 @@ button-full-dose = Dose entière
 button-all-the-same = Oui, quand même
 over-rule-noted = ⚠ Ça dépasse la limite ({ rule-short }) : c’est noté avec.
 over-rule = au-dessus de la limite ({ rule-short })
-total-sum = total { $total } ({ $measured } mesuré { $day } + { $since } ajouté depuis)
+total-sum = total { $total } ({ $measured } mesuré le { $day } + { $since } ajouté depuis)
 limit-is =
     { at }{ $operator ->
         [below] moins de
@@ -485,8 +485,8 @@ ferment-stop =
 ferment-stop-more = Je ne donne pas de dose pour ça. D’ici là : au froid, sans fermeture étanche.
 measure-tomorrow = Mesurer le SO2 libre demain, avant d’en remettre.
 reading-read = { at }{ $list }.
-solution-weigh = Peser { $amount } de { additive } et compléter à l’eau à { $volume }.
-solution-measure = Mesurer { $amount } de { additive } et compléter à l’eau à { $volume }.
+solution-weigh = Peser { $amount } de { additive } et compléter à { $volume } avec de l’eau.
+solution-measure = Mesurer { $amount } de { additive } et compléter à { $volume } avec de l’eau.
 solution-from-powder = Je ne prépare des solutions qu’à partir de poudre : préparer { $volume } de solution de méta à 10%
 solution-strength = Cette solution contient { $strength } g de SO2 dans 100 mL.
 solution-fresh = La faire fraîche, la dater : elle faiblit en quelques jours ou semaines (pratique courante, sans source).
@@ -503,7 +503,7 @@ solution-holding = Solution de conservation, { $volume } : { $acid } d’acide 
 solution-rinse = Rinçage, { $volume } : { $acid } d’acide citrique, { $amount } de { additive }.
 solution-order = Toute l’eau d’abord, puis l’acide, le sulfite en dernier et peu à peu. Jamais de poudre sur l’acide.
 solution-air = Elle dégage du SO2 : ventiler, garder le visage à l’écart, aussi de la bonde.
-solution-for-holding = Pour une barrique vide et propre, pleine jusqu’à la bonde ; la suivre toutes les quelques semaines.
+solution-for-holding = Pour une barrique vide et propre, pleine jusqu’à la bonde ; la revoir au bout de quelques semaines, puis de même.
 solution-for-rinse = Pour du matériel propre : tout mouiller, laisser agir quelques minutes.
 solution-drain = Vidanger selon les règles locales. Rincer à l’eau avant d’y mettre du vin.
 solution-practice = { $salt } et { $acid } g/L : pratique courante, sans source. Ton propre chiffre : { $use ->
@@ -513,7 +513,7 @@ solution-practice = { $salt } et { $acid } g/L : pratique courante, sans source
 solution-not-wine =
     { $vessel ->
         [none] Jamais dans du vin.
-       *[other] Jamais dans du vin : { $vessel } doit être vide. Rien n’est noté pour elle.
+       *[other] Jamais dans du vin : { $vessel } doit être vide. Rien n’en est noté.
     }
 ask-solution-volume =
     { $use ->
@@ -904,7 +904,7 @@ help-round-6 = B1-B24 sauf B7 225 L pH 3,6 libre 18 → toutes sauf une
 help-round-7 = 34 barriques, échantillon moyen : pH 3,6 libre 18 → pour leur moyenne, et ce qu’elle cache
 help-round-8 = Ou envoie un CSV ou XLSX : cuve, volume, pH, SO2 libre. La feuille revient.
 help-stock-1 = Chaque ajout en est tiré, dès qu’il y a quelque chose dedans.
-help-stock-2 = reçu 25 kg de méta lot 4471 chez Norte → aussi 10 L de SO2 6%
+help-stock-2 = reçu 25 kg de méta lot 4471 de chez Norte → aussi 10 L de SO2 6%
 help-stock-3 = stock → ce qu’il y a, par lot ; stock méta : un seul
 help-stock-4 = stock méta 3,2 kg → compté en rayon : vaut à partir de là
 help-stock-5 = utilisé 200 g de méta pour le rinçage → pour aucun vin
@@ -1145,11 +1145,11 @@ round-nothing = { $vessel } ({ $list }) : rien à ajouter
 round-nothing-bare = { at }rien à ajouter
 round-head =
     { $kind ->
-        [powder] Peser { additive }{ round-strength } :
+        [powder] À peser, { additive }{ round-strength } :
         [gas] Peser du SO2 gazeux, au poids seulement ; personnel formé, appareil respiratoire à portée :
         [tablet] Prendre des comprimés effervescents de { $size } g de SO2 :
         [salt-tablet] Prendre des comprimés de { $size } g de { additive } :
-       *[solution] Mesurer { additive }{ round-strength } :
+       *[solution] À mesurer, { additive }{ round-strength } :
     }
 round-strength =
     { $size ->
@@ -1309,7 +1309,7 @@ ask-volume-which =
     }
 read-kept =
     { $new ->
-        [new] Gardé, { $vessel } est nouveau pour moi : { $list }.
+        [new] { $vessel }, première fois, gardé : { $list }.
        *[known] Lu et gardé : { $list }.
     }
 noted-something-else =
@@ -1317,7 +1317,7 @@ noted-something-else =
         [ph] { " " }Le pH est à remesurer.
        *[none] { "" }
     }
-reading-kept = { at }{ $list } : gardé, { $when }.
+reading-kept = { at }{ $list }, gardé ({ $when }).
 button-added = Je l’ai mis
 button-mine = Je m’en charge
 button-order = En consigne
@@ -1334,7 +1334,7 @@ export-written = Écrit : { $path }
 export-none = Rien n’a été noté dans cette période.
 backup-written = Sauvegarde écrite : { $path }
 progress-working = J’y travaille …
-progress-done = C’est fait.
+progress-done = Fait.
 errand-failed = Ça n’a pas marché, rien n’a été écrit. Merci de réessayer ; si ça échoue encore, le dire à qui me gère.
 backup-elsewhere = Qui me gère fait les sauvegardes. Le registre de cette cave s’emporte avec : export tout
 button-undo = Annuler { $entry }
@@ -1360,8 +1360,8 @@ already-noted = Déjà noté { $entry }, { $when } ({ $who ->
 odd-more-than-planned = C’est { $factor } fois ce que j’ai calculé pour { $vessel }. Une erreur ? Alors annuler.
 odd-large = { $added } en un seul ajout, c’est beaucoup. Une erreur ? Alors annuler.
 odd-second = { $vessel } en a déjà eu un, { $when } (entrée { $entry }).
-odd-empty = { $vessel } est notée vide depuis { $when }.
-odd-from-empty = { $vessel } était notée vide depuis { $when }.
+odd-empty = { $vessel } : vide dans mes notes depuis { $when }.
+odd-from-empty = { $vessel } : était vide dans mes notes depuis { $when }.
 odd-over-capacity = { $volume }, c’est plus que la capacité de { $vessel } ({ $capacity }).
 when-noon = Pas d’heure donnée : noté à midi.
 when-future =
@@ -1370,11 +1370,11 @@ when-future =
        *[other] { " " }({ $when })
     }. Pas noté. Le renvoyer avec la bonne heure.
 when-no-such-day = { at }« { $text } » n’existe pas. Pas noté. Le renvoyer avec la bonne heure.
-vessel-new = { $vessel } est nouveau pour moi.
+vessel-new = { $vessel } : première fois que je le vois.
 volume-differs =
     { $vessel } : { $known ->
         [none] { $said }, c’est plus que sa capacité
-       *[other] { $said } n’est pas le { $known } que j’avais
+       *[other] { $said }, j’avais { $known }
     } : pas gardé. Si c’est juste, écrire : { $vessel } contient { $written } maintenant
 ask-zone = Je donne l’heure en UTC. Quel est ton fuseau ? Écrire : fuseau Europe/Paris
 dosed-who =
@@ -1408,15 +1408,15 @@ dosed-in-round =
        *[some] { $list }
     } ({ $when }). L’envoyer seule.
 landed =
-    { $vessel } est arrivé à { $after }{ $planned ->
+    { $vessel } est à { $after }{ $planned ->
         [none] { "" }
        *[other] , prévu { $planned }
     } : sur { $added } { $unit }, { $percent } % combinés.
-landed-loose = { $vessel } est arrivé à { $after }{ $planned ->
+landed-loose = { $vessel } est à { $after }{ $planned ->
         [none] { "" }
        *[other] , prévu { $planned }
     }. La part combinée n’est pas dite : le libre avant les { $added } { $unit } a été lu le { $day }
-landed-fell = { $vessel } est passé de { $before } à { $after } malgré { $added } { $unit } ajoutés : tout combiné, ou une erreur. Remesurer.
+landed-fell = { $vessel } : de { $before } à { $after } malgré { $added } { $unit } ajoutés : tout combiné, ou une erreur. Remesurer.
 landed-too-high = { $vessel } a monté de { $rise } pour seulement { $added } { $unit } ajoutés. Un chiffre est faux : remesurer.
 on-it =
     { $vessel } : { $who ->
@@ -1471,7 +1471,7 @@ event-said =
         [unwatched] , plus de contrôles
         [watched] , contrôles repris
         [forgotten] { " " }oublié
-       *[told] { " " }:
+       *[told] ,
     }
 entry-addition =
     { $vessel } { $known ->
@@ -1501,7 +1501,7 @@ entry-stock =
        *[counted] compté
     } { $list }{ $supplier ->
         [none] { "" }
-       *[other] { " " }chez { $supplier }
+       *[other] { " " }de chez { $supplier }
     }
 entry-correction =
     raye { $entry } : { $reason ->
@@ -1613,12 +1613,12 @@ due-overdue =
 due-landing = { $vessel } : ajout de { $added }, pas mesuré depuis{ due-overdue }{ due-stage }
 due-usual =
     { $vessel } : { $free ->
-        [none] jamais mesurée
+        [none] pas encore de mesure
        *[other] libre { $free } le { $day }
     }{ due-overdue }{ due-stage }
 due-often =
     { $vessel } : { $free ->
-        [none] jamais mesurée
+        [none] pas encore de mesure
        *[other] libre { $free } le { $day }
     }{ $low ->
         [low] , bas
@@ -1626,7 +1626,7 @@ due-often =
     }{ due-overdue }{ due-stage }
 due-forecast =
     { $vessel } : { $free ->
-        [none] jamais mesurée
+        [none] pas encore de mesure
        *[other] libre { $free } le { $day }
     }, peut déjà manquer de libre{ due-overdue }{ due-stage }
 daily-head = Bonjour.
@@ -2071,7 +2071,7 @@ stock-of =
         [none] { "" }
        *[other] , { $size } g pièce
     }
-stock-none = Rien n’est encore noté en stock. Dire ce qu’il y a, ou ce qui est arrivé : reçu 25 kg de méta lot 4471 chez Norte
+stock-none = Rien n’est encore noté en stock. Dire ce qu’il y a, ou ce qui est arrivé : reçu 25 kg de méta lot 4471 de chez Norte
 stock-none-of = Pas de { additive } noté en stock. Dire ce qui est arrivé (reçu …), ou le compter (stock méta 3,2 kg).
 stock-shelf =
     { stock-of } : { $amount }{ stock-tablets }{ $counted ->
@@ -2082,9 +2082,9 @@ stock-lot =
     { "  " }{ $lot ->
         [none] sans lot
        *[other] lot { $lot }
-    } : { $amount }{ stock-tablets }, entré { $day }{ $supplier ->
+    } : { $amount }{ stock-tablets }, entré le { $day }{ $supplier ->
         [none] { "" }
-       *[other] { " " }chez { $supplier }
+       *[other] { " " }de chez { $supplier }
     }
 stock-negative = ⚠ { stock-of } : le registre donne { $amount }{ stock-tablets } : une réception n’est pas notée. La noter, ou compter : stock méta 3,2 kg
 stock-low = ⚠ Bientôt à court : { $amount }{ stock-tablets } de { stock-of } en stock.
@@ -2105,7 +2105,7 @@ stock-noted =
        *[counted] compté
     } { $list }{ $supplier ->
         [none] { "" }
-       *[other] { " " }chez { $supplier }
+       *[other] { " " }de chez { $supplier }
     }{ $purpose ->
         [none] { "" }
        *[other] { " " }({ $purpose })
@@ -2285,8 +2285,8 @@ forecast-measure = { $from ->
 }
 forecast-need = Il lui faut { $needed } : pH { $ph } ({ $day }), { $molecular } moléculaire.
 forecast-none = { $vessel } : { $why ->
-    [unmeasured] pas de libre mesuré depuis son dernier ajout. Mesurer, puis redemander.
-    [below-already] le libre est à { $needed } { $unit } ou dessous, ce que demande son pH. Envoyer la mesure pour une dose.
+    [unmeasured] pas de libre mesuré depuis le dernier ajout. Mesurer, puis redemander.
+    [below-already] le libre est déjà aux { $needed } { $unit } que demande son pH, ou dessous. Envoyer la mesure pour une dose.
    *[no-rate] pas encore de prévision. Aucune vitesse de perte en cuve n’est connue, et la sienne demande { $fewest } mesures depuis le dernier ajout ; il y en a { $number ->
         [one] { $count } seule
        *[many] { $count }
@@ -2294,11 +2294,11 @@ forecast-none = { $vessel } : { $why ->
 }
 forecast-unlanded = { $vessel } : le dernier ajout n’est pas encore arrivé. Mesurer d’abord le SO2 libre.
 blend-share = { $vessel } avec { $other } : { $starts ->
-    [as-it-is] telle quelle, { $vessel } tient les bornes ; jusqu’à { $most } % de { $other } peuvent y entrer.
+    [as-it-is] sans rien changer, { $vessel } tient les bornes ; jusqu’à { $most } % de { $other } peuvent y entrer.
    *[other] de { $least } à { $most } % de { $other } dans l’assemblage.
 }{ $volume ->
     [none] {""}
-   *[other] {" "}Au moins { $volume } de { $other } pour tout { $vessel }{ $enough ->
+   *[other] {" "}Au moins { $volume } de { $other } pour la totalité de { $vessel }{ $enough ->
         [no] {" "}; il n’y en a que { $held }.
        *[yes] .
     }
@@ -2323,22 +2323,22 @@ blend-fails = { $vessel } avec { $other } : aucune part ne va : { $fails ->
 }
 blend-figures = D’après le libre connu : { $list }.
 blend-figure = { $vessel } { $free } ({ $day })
-blend-bounds = Tenu à : { $list }.
+blend-bounds = Bornes tenues : { $list }.
 blend-bound-total = total au plus { $limit }
 blend-bound-no-total = pas de total (un n’est pas mesuré)
 blend-bound-free = libre au plus { $limit }
 blend-bound-molecular = moléculaire { $least ->
     [none] au plus { $most }
    *[other] { $least }–{ $most }
-}, au moins bon des deux pH
+}, au pire des deux pH
 blend-bound-no-ph = pas de moléculaire (un pH n’est pas mesuré)
-blend-whole = Tout des deux, { $volume } : { $free ->
+blend-whole = Les deux en entier, { $volume } : { $free ->
     [none] libre inconnu
    *[other] libre { $free }
 }, { $total ->
     [none] total inconnu
    *[other] total { $total }
-}, avant que la combinaison bouge.
+}, avant que la combinaison ne bouge.
 blend-care = Le pH d’un assemblage ne se calcule pas : en mêler un verre dans cette part, mesurer pH, libre et total, puis décider. Les autres limites des deux vins comptent aussi.
 too-much-head = { $vessel } : { $free ->
     [none] libre pas mesuré
