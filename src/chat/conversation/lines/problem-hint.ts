@@ -56,7 +56,7 @@ export function hintFor(reading: Reading, words: string, mark: DecimalMark): Hin
   if (/^\d+\s*\/\s*\d+/.test(about)) return { ...none, kind: 'pair' };
   if (second !== '' && /^\d+\s+\p{L}+\s+\d+$/u.test(about)) return { ...none, kind: 'to' };
   const named = additive === undefined ? '' : (reading.where.additive?.text ?? '');
-  const hint = ofConcentration(about, first, named);
+  const hint = ofConcentration(about, first, { named, mark });
   return hint.kind === 'free' && fields.free_mg_L !== undefined ? { ...hint, kind: 'other' } : hint;
 }
 
@@ -70,20 +70,24 @@ function isPh(text: string): boolean {
 }
 
 /** A figure in mg/L, or alone: of SO2 or powder beside an additive, else free or total, or an aim after a verb. */
-function ofConcentration(about: string, first: string, named: string): Hint {
+function ofConcentration(
+  about: string,
+  first: string,
+  { named, mark }: { readonly named: string; readonly mark: DecimalMark },
+): Hint {
   const isPerHectolitre = /g\s*(\/|\p{L}+)\s*h/iu.test(about);
   const mg_L = Number(first.replace(',', '.')) * (isPerHectolitre ? 10 : 1);
   if (!(mg_L <= MOST_mg_L)) return { kind: 'other', one: '', two: '', named };
-  const one = plain(mg_L);
+  const one = plain(mg_L, mark);
   const hasUnit = isPerHectolitre || /ppm|mg/i.test(about);
-  if (hasUnit && named !== '') return { kind: 'powder', one, two: plain(mg_L / 100), named };
+  if (hasUnit && named !== '') return { kind: 'powder', one, two: plain(mg_L / 100, mark), named };
   if (isPerHectolitre || /^\s*[\d.,]+\s*(ppm|mg\/l)?$/i.test(about))
     return { kind: first === '' || isPh(first) ? 'other' : 'free', one, two: '', named };
   return { kind: hasUnit ? 'aim' : 'other', one, two: '', named };
 }
 
-function plain(value: number): string {
-  return numberText(value, 4, '.').replace(/\s/g, '');
+function plain(value: number, mark: DecimalMark): string {
+  return numberText(value, 4, mark).replace(/\s/g, '');
 }
 
 /** Both figures written so that no mark is left that could part thousands. */
