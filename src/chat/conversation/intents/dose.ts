@@ -65,6 +65,8 @@ function wholeDose(reading: Reading, request: DoseRequest, answer: DoseAnswer, t
   const inFull = !turn.cautioned.has(additive.id);
   const first = firstOfDose(vesselText(reading), answer, additive, manner);
   const condition = conditionLines(reading, answer, manner);
+  const warned = warningLines(answer.warnings, manner, 'warning', lowIsSaid(reading));
+  const said = [...underLines(answer.warnings, manner), ...warned];
   return {
     answer,
     inRound: [
@@ -93,10 +95,12 @@ function wholeDose(reading: Reading, request: DoseRequest, answer: DoseAnswer, t
           ...mixedSampleLines(reading),
           ...factLines(reading, manner),
           ...assumedLines(reading, manner),
-          ...(isNearLimit(answer) ? lawAssumedLines(reading, turn.settings) : []),
+          ...(said.some(({ key }) => NAMES_A_LIMIT.includes(key))
+            ? lawAssumedLines(reading, turn.settings)
+            : []),
           ...basisLines(reading, answer, manner),
           ...workingLines(answer.steps, manner),
-          ...warningLines(answer.warnings, manner, 'warning', lowIsSaid(reading)),
+          ...warned,
           ...cautionLines(additive, inFull),
         ],
     buttons: turn.round
@@ -124,10 +128,12 @@ function isOfRound({ key }: Line): boolean {
   );
 }
 
-/** Whether the wine comes near a limit, or passes it, so that what was taken for it is worth a word. */
-function isNearLimit({ warnings }: DoseAnswer): boolean {
-  return warnings.some(({ code }) => code === 'total-near-limit' || code === 'total-over-limit');
-}
+/** Lines that name a limit, so that what was taken for it is worth a word. */
+const NAMES_A_LIMIT: readonly Line['key'][] = [
+  'warning-total-near-limit',
+  'warning-total-over-limit',
+  'warning-total-unknown-most',
+];
 
 /** Whether a vessel is named whose colour nobody has told. */
 function isColourUnknown({ fields }: Reading): boolean {
