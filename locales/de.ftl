@@ -115,7 +115,7 @@ refused-ammonium-must =
 dose-nothing = { at }nichts zuzugeben.
 dose-rate = { at }{ $dose } SO2 fehlen, das sind { measured } pro { $per }
 dose-rate-bare = { at }{ $dose } SO2 fehlen
-dose-need = { at }für { $molecular } molekular braucht es bei pH { $ph } { $free } frei
+dose-need = { at }für { $molecular } molekular bei pH { $ph } braucht es { $free } frei
 dose-now = { at }jetzt { $molecular } molekular (pH { $ph }, { $free } frei)
 
 ## The law
@@ -166,9 +166,9 @@ rule-class =
         [sweet-300] , süß mit Sondergrenze
         [sweet-350] , süß mit Sondergrenze
         [sweet-400] , süß mit Sondergrenze
-        [national-pdo] , g.U.
-        [national-pdo-dry] , g.U. trocken
-        [national-pdo-other] , g.U. nicht trocken
+        [national-pdo] , gU
+        [national-pdo-dry] , gU trocken
+        [national-pdo-other] , gU nicht trocken
         [dry] , trocken
         [sweet] , süß
         [bulk-export] , Fasswein für den Export
@@ -381,7 +381,7 @@ bottling-each =
     }
 bottling-measured = In Zahlen aus der Praxis (nicht bestätigt) ist es { $each } zu 1: dann reichen { bare-amount }. So rechnen: Sauerstoff { $oxygen } mg/l mal { $each }
 bottling-measured-none = In Zahlen aus der Praxis (nicht bestätigt) ist es { $each } zu 1: dann fehlt nichts. So rechnen: Sauerstoff { $oxygen } mg/l mal { $each }
-condition-stage = Nur wenn der BSA fertig oder nicht gewollt ist.
+condition-stage = Nur wenn BSA fertig oder nicht gewollt ist.
 condition-red =
     { $kind ->
         [none] Ist es Rotwein ({ $red } molekular): nichts zuzugeben.
@@ -460,7 +460,7 @@ nothing-why-free = { $free } frei; das Ziel ist { target }.
 adds =
     { $number ->
         [many] { at }{ $list } bringen { $adds } SO2
-       *[one] { at }{ $list } bringt { $adds } SO2
+       *[one] { at }{ $list } bringen { $adds } SO2
     }
 adds-rate = { at }„{ $rate }“ ({ $ofAdditive } { additive }) bringt { $adds } SO2
 amount = { $amount } { additive }
@@ -566,7 +566,7 @@ fact-quality =
         [yes] Qualitätsschaumwein
        *[no] kein Qualitätsschaumwein
     }
-fact-pdo = geschützter Ursprung (g.U.)
+fact-pdo = geschützter Ursprung (gU)
 fact-bulk = Fasswein für den Export
 fact-density = Dichte { $density } kg/L
 fact-reserve = { $reserve } für die Füllung frei gehalten
@@ -1157,7 +1157,7 @@ round-red = „Wenn rot“ gilt für { $red } molekular.
 round-stock = Als Lösung davon mit { $strength } %: { $list }.
 round-rest = Der Rest als Lösung mit { $strength } %: { $list }.
 round-stock-of = { $vessel } { $amount }
-mixed-sample = Das gilt fürs Mittel der { $count }: eine Mischprobe zeigt das niedrigste nicht. Liegt eins 5 tiefer, landet es 5 tiefer. Wie weit sie abweichen, weiß ich nicht: erst einige einzeln messen (üblich, ohne Quelle).
+mixed-sample = Gilt fürs Mittel der { $count }: das niedrigste zeigt eine Mischprobe nicht. Liegt eins 5 tiefer, landet es 5 tiefer. Wie weit sie abweichen, weiß ich nicht: erst einige einzeln messen (üblich, ohne Quelle).
 round-mixed = ⚠ Eine Mischprobe zeigt das Mittel, nicht das niedrigste: { $list }. Miss einige einzeln.
 round-low = ⚠ Unter 10 frei kann viel oder alles binden: { $list }. Dort messen, bevor du nochmal zugibst.
 round-name = { $name }
