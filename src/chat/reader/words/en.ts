@@ -32,6 +32,7 @@ export const en: Words = {
     'unit:quintal': ['q', 'quintal', 'quintals'],
     'unit:ppm': ['ppm', 'ppms', 'pmm', 'parts per million'],
     'unit:mg/L': ['mgl', 'mg l'],
+    'unit:g/hL': ['g hl', 'gr hl'],
     'unit:C': ['c', 'celsius', 'centigrade'],
     'unit:F': ['f', 'fahrenheit'],
     'unit:degree': ['deg', 'degs', 'degree', 'degrees'],

@@ -19,6 +19,7 @@ export const EVERYWHERE: Words['says'] = {
   'unit:quintal': ['q'],
   'unit:ppm': ['ppm', 'ppms'],
   'unit:mg/L': ['mgl', 'mg l'],
+  'unit:g/hL': ['g hl', 'gr hl'],
   'unit:C': ['c', 'celsius'],
   'unit:F': ['f', 'fahrenheit'],
   'unit:none-of-ours': [
