@@ -1351,7 +1351,7 @@ noted-addition =
        *[other] { " " }La consigne { $order } est faite.
     }
 noted-bare = Noté { $entry } : { $vessel } { $added } de SO2, { $when }.
-noted-measure = Mesurer le SO2 libre à partir de { $when }, avant d’en remettre.
+noted-measure = Mesurer le SO2 libre dès { $when }, avant d’en remettre.
 noted-measure-now = Mesurer le SO2 libre avant d’en remettre.
 already-noted = Déjà noté { $entry }, { $when } ({ $who ->
         [you] toi
@@ -1396,12 +1396,12 @@ dosed-sampled-before =
     { $vessel } : pas de dose : { dosed-who } ajouté { $known ->
         [none] du SO2
        *[some] { $list }
-    } ({ $when }), après ce prélèvement. Remesurer à partir de { $next }.
+    } ({ $when }), après ce prélèvement. Remesurer dès { $next }.
 dosed-landed =
     { $vessel } : rien de plus pour l’instant : { dosed-who } ajouté { $known ->
         [none] du SO2
        *[some] { $list }
-    } ({ $when }), et le SO2 se combine encore pendant un jour. Remesurer à partir de { $next }.
+    } ({ $when }), et le SO2 se combine encore pendant un jour. Remesurer dès { $next }.
 dosed-in-round =
     { $vessel } : pas de dose : { dosed-who } ajouté { $known ->
         [none] du SO2
@@ -1610,7 +1610,7 @@ due-overdue =
         [no] { "" }
        *[yes] , { $days } j de retard
     }
-due-landing = { $vessel } : ajout de { $added }, pas mesuré depuis{ due-overdue }{ due-stage }
+due-landing = { $vessel } : ajout ({ $added }) pas mesuré depuis{ due-overdue }{ due-stage }
 due-usual =
     { $vessel } : { $free ->
         [none] pas encore de mesure
