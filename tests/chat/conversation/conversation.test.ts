@@ -118,10 +118,11 @@ test('ppm stays ppm for one who writes ppm', async () => {
   );
 });
 
-test('a message in a language without sentences yet is answered in English', async () => {
-  expect(textOf(await startTalk(DEFAULT_SETTINGS, 'de').write('T4 40 hl pH 3,4 frei 15'))).toContain(
-    'T4: weigh',
-  );
+test.each([
+  ['es', 'T4 40 hl pH 3,4 libre 15', 'T4: pesa 117 g'],
+  ['de', 'T4 40 hl pH 3,4 frei 15', 'T4: 117 g'],
+] as const)('a chat in %s is answered in it, with the same amount', async (language, text, first) => {
+  expect(textOf(await startTalk(DEFAULT_SETTINGS, language).write(text))).toContain(first);
 });
 
 test('the OIV basis is used only where alcohol and temperature allow it, else that is said with what it would change', async () => {
