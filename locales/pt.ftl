@@ -508,7 +508,7 @@ solution-practice = { $salt } e { $acid } g/L: prática comum, sem fonte. Com um
 solution-not-wine =
     { $vessel ->
         [none] Nunca no vinho.
-       *[other] Nunca no vinho: { $vessel } tem de estar vazia. Não fica nada registado dela.
+       *[other] Nunca no vinho: { $vessel } tem de estar sem vinho. Disto não fica nada registado.
     }
 ask-solution-volume =
     { $use ->
@@ -1303,7 +1303,7 @@ ask-volume-which =
     }
 read-kept =
     { $new ->
-        [new] Guardado, { $vessel } é nova para mim: { $list }.
+        [new] Guardado, não conhecia { $vessel }: { $list }.
        *[known] Lido e guardado: { $list }.
     }
 noted-something-else =
@@ -1354,8 +1354,8 @@ already-noted = Já estava registado como { $entry }, { $when } ({ $who ->
 odd-more-than-planned = É { $factor } vezes o que calculei para { $vessel }. Engano? Então anula.
 odd-large = { $added } numa só adição é muito. Engano? Então anula.
 odd-second = { $vessel } já tinha uma, { $when } (entrada { $entry }).
-odd-empty = { $vessel } está dada como vazia desde { $when }.
-odd-from-empty = { $vessel } estava dada como vazia desde { $when }.
+odd-empty = Pelo registo { $vessel } está sem vinho desde { $when }.
+odd-from-empty = Pelo registo { $vessel } estava sem vinho desde { $when }.
 odd-over-capacity = { $volume } é mais do que os { $capacity } que { $vessel } leva.
 when-noon = Sem hora dita: fica ao meio-dia.
 when-future =
@@ -1364,7 +1364,7 @@ when-future =
        *[other] { " " }({ $when })
     }. Não registado. Manda outra vez com a hora a que foi.
 when-no-such-day = { at }«{ $text }» não existe. Não registado. Manda outra vez com a hora a que foi.
-vessel-new = { $vessel } é nova para mim.
+vessel-new = Não conhecia { $vessel }.
 volume-differs =
     { $vessel }: { $known ->
         [none] { $said } é mais do que lá cabe
@@ -1432,7 +1432,7 @@ on-it =
         [you] estás tu
        *[other] está { $who }
     } a tratar, desde { $when }.
-claimed = { $vessel } é tua até { $until }. Os outros veem-no.
+claimed = { $vessel } fica contigo até { $until }. Os outros veem-no.
 claim-taken = { $vessel }: está { $who } a tratar, desde { $when }.
 ordered = Ordem { $entry }: { $vessel } { $list }.
 ordered-open = Aberta até alguém registar o que entrou.
@@ -1463,23 +1463,23 @@ fact-chemical-lot = lote { $lot }
 fact-remark = «{ $remark }»
 event-said =
     { $event ->
-        [racked] { " " }trasfegada
-        [topped] { " " }atestada
-        [acid] { " " }acidificada
+        [racked] { " " }trasfega
+        [topped] { " " }atesto
+        [acid] { " " }acidificação
         [moved] { $whole ->
-            [part] { " " }passada em parte para { $to }
-           *[all] { " " }passada para { $to }
+            [part] { " " }passa em parte para { $to }
+           *[all] { " " }passa para { $to }
         }
         [blended] { $whole ->
-            [part] { " " }loteada em parte em { $to }
-           *[all] { " " }loteada em { $to }
+            [part] { " " }entra em parte no lote de { $to }
+           *[all] { " " }entra no lote de { $to }
         }
-        [emptied] { " " }vazia
+        [emptied] { " " }sem vinho
         [lot] { " " }é { $lot }
         [later] , sem medição antes de { $until }
         [unwatched] , sem mais medições
         [watched] , medições outra vez
-        [forgotten] { " " }esquecida
+        [forgotten] { " " }fora da lista
        *[told] :
     }
 entry-addition =
@@ -1554,14 +1554,14 @@ vessels-line =
         [none] sem análise
        *[other] livre { $free } ({ $day })
     }{ $next ->
-        [empty] , vazia
+        [empty] , sem vinho
         [now] , MEDIR AGORA
         [later] , a seguir { $check }
        *[none] { "" }
     }
 vessel-head = { $vessel }: { $list }
 vessel-bare = { $vessel }
-vessel-empty = { $vessel }: vazia desde { $day }
+vessel-empty = { $vessel }: sem vinho desde { $day }
 vessel-readings = Última: { $list }
 vessel-void =
     { $field ->
@@ -1570,11 +1570,11 @@ vessel-void =
     } por saber desde { $day }: { $event ->
         [malolactic] malolática
         [fermentation] nessa altura era mosto
-        [blended] loteada
-        [acid] acidificada
-        [racked] trasfegada
-        [topped] atestada
-       *[moved] passada
+        [blended] lote
+        [acid] acidificação
+        [racked] trasfega
+        [topped] atesto
+       *[moved] passagem
     }.
 vessel-addition =
     { $entry } · { $when } · { $list }{ $added ->
@@ -1622,12 +1622,12 @@ due-overdue =
 due-landing = { $vessel }: adição de { $added }, por medir desde então{ due-overdue }{ due-stage }
 due-usual =
     { $vessel }: { $free ->
-        [none] nunca medida
+        [none] sem análise
        *[other] livre { $free } em { $day }
     }{ due-overdue }{ due-stage }
 due-often =
     { $vessel }: { $free ->
-        [none] nunca medida
+        [none] sem análise
        *[other] livre { $free } em { $day }
     }{ $low ->
         [low] , baixo
@@ -1635,7 +1635,7 @@ due-often =
     }{ due-overdue }{ due-stage }
 due-forecast =
     { $vessel }: { $free ->
-        [none] nunca medida
+        [none] sem análise
        *[other] livre { $free } em { $day }
     }, já pode não chegar{ due-overdue }{ due-stage }
 daily-head = Bom dia.
@@ -1981,7 +1981,7 @@ picture-addition =
 picture-unmeasured = Livre por medir desde a adição de { $day }.
 picture-came-from = Veio de { $vessels } em { $day }: os números anteriores estão lá.
 picture-was-blended = Loteado em { $day }: os números anteriores são de outro vinho.
-picture-empty = Vazia desde { $day }.
+picture-empty = Sem vinho desde { $day }.
 picture-is-odd = Livre acima do total ({ $days }): um dos dois está mal, mede outra vez.
 picture-nothing = Sem gráfico de { $vessel }: do vinho que lá está ainda não se mediu SO2.
 
@@ -2319,7 +2319,7 @@ blend-share = { $vessel } com { $other }: { $starts ->
    *[other] de { $least } a { $most } % de { $other } no lote.
 }{ $volume ->
     [none] {""}
-   *[other] {" "}O mínimo são { $volume } de { $other } para { $vessel } toda{ $enough ->
+   *[other] {" "}O mínimo são { $volume } de { $other } para tudo o que há em { $vessel }{ $enough ->
         [no] ; só tem { $held }.
        *[yes] .
     }
