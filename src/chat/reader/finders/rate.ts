@@ -15,7 +15,9 @@ function perAfter(board: Board, i: number): number | undefined {
   let k = i;
   while (
     k < i + 3 &&
-    (isCue(board, k, 'of') || board.terms[k]?.tags.some((tag) => tag.startsWith('additive')) === true)
+    (isCue(board, k, 'of') ||
+      hasTag(board, k, 'label:so2') ||
+      board.terms[k]?.tags.some((tag) => tag.startsWith('additive')) === true)
   )
     k++;
   return isPer(board, k) ? k : undefined;
@@ -64,7 +66,11 @@ function findRateAt(board: Board, i: number): void {
   const base = per === undefined ? undefined : baseAt(board, per + 1);
   if (per === undefined || base === undefined) return;
   const { value, unsure } = figureAt(board, i);
-  if (unsure || base.unsure) return refuse(board, 'ambiguous-number', i, base.to);
+  // `2 g SO2 per hl` is no mass of an additive: to add, or what is in it?
+  const isOfSO2 = board.terms
+    .slice(unit.to + 1, per)
+    .some((_, k) => hasTag(board, unit.to + 1 + k, 'label:so2'));
+  if (unsure || base.unsure || isOfSO2) return refuse(board, 'ambiguous-number', i, base.to);
   const between = (from: number, to: number): void => {
     for (let k = from; k <= to; k++)
       if (!termAt(board, k).tags.some((tag) => tag.startsWith('additive'))) claim(board, k, k);

@@ -57,6 +57,10 @@ const mayGoIn = (board: Board, i: number): boolean => {
   );
 };
 
+/** `50 of kmbs`: grams or mg/L of an additive, and no reading. */
+const isOfAdditive = (board: Board, i: number): boolean =>
+  isCue(board, i + 1, 'of') && board.terms[i + 2]?.tags.some((tag) => tag.startsWith('additive:')) === true;
+
 /** An article alone names no tank: `the 4`. */
 const isAfterArticle = (board: Board, i: number): boolean =>
   isCue(board, i - 1, 'article') || isMark(board, i - 1, '#');
@@ -109,7 +113,7 @@ function findFree(board: Board, candidates: readonly number[]): void {
   const fine =
     !speaksOfAdding(board) &&
     !isOfUnknown(board, only) && !((unit !== undefined || !board.lexicon.isTold) && holdsUnknownVerb(board)) &&
-    only !== undefined && figure !== undefined && !isTaken && rangeEnd(board, only) === undefined && !isAfterInto(board, only) && !isAfterArticle(board, only) && !mayGoIn(board, only) &&
+    only !== undefined && figure !== undefined && !isOfAdditive(board, only) && !isTaken && rangeEnd(board, only) === undefined && !isAfterInto(board, only) && !isAfterArticle(board, only) && !mayGoIn(board, only) &&
     vintage === undefined && !isMark(board, only + 1, '/') && !isMark(board, only - 1, '/') && figure.value <= MOST_UNLABELLED_FREE_mg_L && (isWhole(board, only) || unit !== undefined) && unit?.id !== 'g/L'; // prettier-ignore
   if (fine && figure.value < 0) return refuse(board, 'negative-value', figure.from, only);
   if (fine) {
