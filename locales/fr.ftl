@@ -353,11 +353,11 @@ designation-asked =
 
 ## The first line: a choice and not a dose
 
-choice-head = { at }un choix, pas une dose : à pH { $ph }, { $target } moléculaire demande { $free } de libre.
+choice-head = { at }un choix, pas une dose : à pH { $ph }, { $target } moléculaire demande { $free } libre.
 choice-leave = { $mark } Laisser : { $free } de libre, c’est { $molecular } moléculaire.
 choice-to =
     { $total ->
-        [unknown] { $mark } À { $free } ({ $molecular } moléculaire) : { measured } ; total inconnu : le mesurer d’abord
+        [unknown] { $mark } À { $free } ({ $molecular } moléculaire) : { measured } ; mesurer d’abord le total
        *[known] { $mark } À { $free } ({ $molecular } moléculaire) : { measured }
     }
 choice-no-amount = – À { $free } ({ $molecular } moléculaire) : pas de quantité : le total dépasserait { $limit } ({ law-of }).
@@ -367,7 +367,7 @@ choice-red =
         [over] Si c’est un rouge, { $red } demande { $free } de libre : pas de quantité, le total dépasserait { $limit } ({ law-of }).
        *[other] Si c’est un rouge, { $red } demande { $free } de libre : { bare-amount }.
     }
-ways-out = Sinon : plus froid, plus propre, contrôlé plus souvent ; acidifier pour baisser le pH : voir avec un œnologue.
+ways-out = Sinon : plus froid, plus propre, plus de contrôles ; acidifier : voir avec un œnologue.
 
 ## The stage
 
@@ -411,12 +411,12 @@ stage-word =
 
 ## What it does
 
-effect-land = { $after } { $unit } de libre si rien ne se combine ; attendre { $range }, un tiers à la moitié se combine d’habitude ; mesurer demain.
-effect-land-molecular = De { $molecularNow } à { $molecular } moléculaire : { $after } { $unit } de libre si rien ne se combine ; attendre { $range }, un tiers à la moitié se combine d’habitude ; mesurer demain.
-effect-land-to-molecular = À { $molecular } moléculaire : { $after } { $unit } de libre si rien ne se combine ; attendre { $range }, un tiers à la moitié se combine d’habitude ; mesurer demain.
+effect-land = { $after } { $unit } de libre si rien ne se combine ; attendre { $range } (1/3 à 1/2 se combine d’habitude) ; mesurer demain.
+effect-land-molecular = De { $molecularNow } à { $molecular } moléculaire : { $after } { $unit } de libre si rien ne se combine ; attendre { $range } (1/3 à 1/2 se combine d’habitude) ; mesurer demain.
+effect-land-to-molecular = À { $molecular } moléculaire : { $after } { $unit } de libre si rien ne se combine ; attendre { $range } (1/3 à 1/2 se combine d’habitude) ; mesurer demain.
 effect-land-low = { $after } { $unit } de libre si rien ne se combine ; sous 10 de libre, beaucoup ou tout peut se combiner : attendre { $range }, mesurer avant d’en remettre.
 effect-land-small = { $after } { $unit } de libre au plus : la hausse est plus petite que l’erreur de mesure.
-effect-rise = Le libre monte d’environ { $range } { $unit }, un tiers à la moitié se combine d’habitude ; mesurer demain.
+effect-rise = Le libre monte d’environ { $range } { $unit } (1/3 à 1/2 se combine d’habitude) ; mesurer demain.
 effect-must = La plus grande part se combine pendant la fermentation du moût : elle ne protège pas le vin ensuite.
 must-comes-back = Environ un tiers se retrouve en SO2 total : + { $total } { $unit } (texte professionnel allemand, 2012).
 must-yeast = Levurer { $least } à { $most } heures après (pratique courante, sans source).
@@ -445,7 +445,7 @@ must-colour =
     }
 must-say-state = La vendange est-elle saine ? Écrire sain, un peu abîmé ou pourri, et il y aura un chiffre à choisir.
 button-published = Ajouter { $add }
-effect-raise = + { $dose } { $unit } si rien ne se combine ; un tiers à la moitié se combine d’habitude ; mesurer demain.
+effect-raise = + { $dose } { $unit } si rien ne se combine (d’habitude 1/3 à 1/2 se combine) ; mesurer demain.
 third-needs =
     { $third ->
         [more] {" "}; si un tiers se combine, il en faut moitié plus
@@ -489,9 +489,9 @@ solution-weigh = Peser { $amount } de { additive } et compléter à { $volume } 
 solution-measure = Mesurer { $amount } de { additive } et compléter à { $volume } avec de l’eau.
 solution-from-powder = Je ne prépare des solutions qu’à partir de poudre : préparer { $volume } de solution de méta à 10%
 solution-strength = Cette solution contient { $strength } g de SO2 dans 100 mL.
-solution-fresh = La faire fraîche, la dater : elle faiblit en quelques jours ou semaines (pratique courante, sans source).
+solution-fresh = La faire fraîche, la dater : elle faiblit en jours ou semaines (pratique courante, sans source).
 solution-per-barrel = Dans une barrique de { $barrel }, 1 mL apporte { $adds } mg/L ; { $rise } mg/L demandent { $amount }.
-solution-us-water = C’est aussi de l’eau : aux États-Unis 1 % du vin au plus, tous ajouts compris (27 CFR 24.246).
+solution-us-water = C’est aussi de l’eau : aux États-Unis 1 % du vin au plus en tout (27 CFR 24.246).
 solution-too-much = Non : { $wanted } g/L ne se dissout pas sûrement. Publié pour { additive } à { $celsius } °C : { $least ->
         [none] { $most } g/L ({ $source }).
        *[other] { $least } et { $most } g/L ({ $source }).
@@ -501,11 +501,11 @@ solution-too-cold = Non : { $wanted } g/L dans une eau à { $water } °C. Publi
 solution-colder = Rien n’est publié sous { $celsius } °C : vérifier que tout est dissous.
 solution-holding = Solution de conservation, { $volume } : { $acid } d’acide citrique, { $amount } de { additive }.
 solution-rinse = Rinçage, { $volume } : { $acid } d’acide citrique, { $amount } de { additive }.
-solution-order = Toute l’eau d’abord, puis l’acide, le sulfite en dernier et peu à peu. Jamais de poudre sur l’acide.
-solution-air = Elle dégage du SO2 : ventiler, garder le visage à l’écart, aussi de la bonde.
-solution-for-holding = Pour une barrique vide et propre, pleine jusqu’à la bonde ; la revoir au bout de quelques semaines, puis de même.
+solution-order = Toute l’eau, puis l’acide, le sulfite en dernier, peu à peu. Jamais de poudre sur l’acide.
+solution-air = Elle dégage du SO2 : ventiler, visage à l’écart, aussi de la bonde.
+solution-for-holding = Pour une barrique vide et propre, pleine à la bonde ; à revoir après quelques semaines.
 solution-for-rinse = Pour du matériel propre : tout mouiller, laisser agir quelques minutes.
-solution-drain = Vidanger selon les règles locales. Rincer à l’eau avant d’y mettre du vin.
+solution-drain = Vidanger selon les règles locales. Rincer à l’eau avant le vin.
 solution-practice = { $salt } et { $acid } g/L : pratique courante, sans source. Ton propre chiffre : { $use ->
         [holding] solution de conservation { $litres } L 1% méta
        *[rinse] rinçage { $litres } L 1% méta
@@ -826,14 +826,14 @@ caution-grapes-and-must-only = Pour raisin et moût seulement.
 caution-ventilate = Ventiler.
 caution-never-lean-in = Ne jamais se pencher dans une cuve.
 caution-gloves-goggles = Gants, lunettes.
-caution-no-acid-no-chlorine = Jamais avec un acide ni un produit chloré.
-caution-no-other-acid-no-chlorine = Aucun autre acide, aucun produit chloré.
-caution-asthma = Pas pour les asthmatiques.
+caution-no-acid-no-chlorine = Jamais d’acide ni de chlore avec.
+caution-no-other-acid-no-chlorine = Aucun autre acide, pas de chlore.
+caution-asthma = Pas pour asthmatiques.
 caution-crush-first = Écraser, dissoudre dans un peu de vin ou d’eau.
-caution-dissolve-first = Dissoudre d’abord dans un peu de vin ou d’eau.
-caution-foams-with-carbon-dioxide = Un vin plein de CO2 déborde en mousse.
+caution-dissolve-first = Dissoudre dans un peu de vin ou d’eau.
+caution-foams-with-carbon-dioxide = Vin plein de CO2 : ça déborde.
 caution-mix-and-measure-again = Mélanger, mesurer après un jour.
-caution-label-and-rules-first = L’étiquette, les règles locales et un professionnel d’abord.
+caution-label-and-rules-first = Étiquette, règles locales, professionnel d’abord.
 cautions-of = ⚠ { additive } : { $list }
 cautions-short = ⚠ Précautions comme avant : bouton Sécurité.
 
@@ -1162,13 +1162,13 @@ round-red = « Si rouge » vaut pour { $red } moléculaire.
 round-stock = En solution à { $strength } % : { $list }.
 round-rest = Le reste en solution à { $strength } % : { $list }.
 round-stock-of = { $vessel } { $amount }
-mixed-sample = Ça vaut pour la moyenne des { $count } : un échantillon moyen ne montre pas le plus bas. Leur écart n’est pas connu ; un qui est 5 plus bas finit 5 plus bas. En mesurer quelques-uns avant de tout sulfiter (pratique courante, sans source).
+mixed-sample = C’est la moyenne des { $count } : elle ne montre pas le plus bas. L’écart n’est pas connu ; un fût 5 plus bas finit 5 plus bas. En mesurer quelques-uns avant (pratique courante, sans source).
 round-mixed = ⚠ Un échantillon moyen dit la moyenne, pas le plus bas : { $list }. En mesurer quelques-uns.
 round-low = ⚠ Sous 10 de libre, beaucoup ou tout peut se combiner : { $list }. Y mesurer avant d’en remettre.
 round-name = { $name }
 round-again = Renvoyer en entier chaque ligne qui n’a pas pu être lue.
 round-total =
-    En tout { $list } : les { $count } quantités arrondies, additionnées.
+    En tout { $list } (somme des { $count } quantités arrondies).
 round-total-of =
     { $kind ->
         [tablet] { $amount } comprimés effervescents de { $size } g de SO2
@@ -1251,8 +1251,8 @@ round-not-understood =
         [none] Une ligne que je n’ai pas pu lire.
        *[other] « { $about } » : je n’ai pas pu lire.
     }
-round-effect-short = Un tiers à la moitié se combine d’habitude : mesurer demain.
-round-effect = Un tiers à la moitié d’un ajout se combine d’habitude : mesurer demain. Pour le calcul d’une cuve, envoyer sa ligne seule.
+round-effect-short = D’habitude 1/3 à 1/2 se combine : mesurer demain.
+round-effect = D’habitude 1/3 à 1/2 d’un ajout se combine : mesurer demain. Calcul d’une cuve : envoyer sa ligne seule.
 choice-additive = { $value ->
         [potassium-metabisulfite] Métabisulfite de potassium E224
         [sodium-metabisulfite] Métabisulfite de sodium E223

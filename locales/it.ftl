@@ -54,11 +54,11 @@ at =
 for-each =
     { $count ->
         [one] {""}
-       *[other] {" "}per ciascuna
+       *[other] {" "}ciascuna
     }
 target =
     { $kind ->
-        [molecular] { $value } di molecolare
+        [molecular] { $value } molecolare
         [free] { $value } di libera
        *[add] + { $value }
     }
@@ -354,12 +354,12 @@ designation-asked =
 
 ## La prima riga: una scelta e non una dose
 
-choice-head = { at }una scelta, non una dose: a pH { $ph }, per { $target } di molecolare servono { $free } di libera.
+choice-head = { at }una scelta, non una dose: a pH { $ph }, { $target } di molecolare = { $free } di libera.
 choice-leave = { $mark } Lascia così: { $free } di libera sono { $molecular } di molecolare.
 choice-to =
     { $total ->
-        [unknown] { $mark } A { $free } ({ $molecular } di molecolare): { measured }; totale non nota: misurala prima
-       *[known] { $mark } A { $free } ({ $molecular } di molecolare): { measured }
+        [unknown] { $mark } A { $free } ({ $molecular } mol.): { measured }; misura la totale
+       *[known] { $mark } A { $free } ({ $molecular } mol.): { measured }
     }
 choice-no-amount = – A { $free } ({ $molecular } di molecolare): nessuna quantità, la totale passerebbe { $limit } ({ law-of }).
 choice-red =
@@ -368,7 +368,7 @@ choice-red =
         [over] Se è rosso, per { $red } servono { $free } di libera: nessuna quantità, la totale passerebbe { $limit } ({ law-of }).
        *[other] Se è rosso, per { $red } servono { $free } di libera: { bare-amount }.
     }
-ways-out = Oppure: più freddo, più pulito, controlli più fitti; acido per abbassare il pH: chiedi a un enologo.
+ways-out = Oppure: più freddo, più pulizia, più controlli; acido per il pH: chiedi a un enologo.
 
 ## La fase
 
@@ -382,7 +382,7 @@ bottling-each =
     }
 bottling-measured = Cifre di settore (non confermate) danno { $each } per 1: allora bastano { bare-amount }. Per contare così: ossigeno { $oxygen } mg/L a { $each }
 bottling-measured-none = Cifre di settore (non confermate) danno { $each } per 1: allora non serve niente. Per contare così: ossigeno { $oxygen } mg/L a { $each }
-condition-stage = Solo se la malolattica è finita o non la vuoi.
+condition-stage = Solo a malolattica finita o non voluta.
 condition-red =
     { $kind ->
         [none] Se è rosso ({ $red } di molecolare): niente da aggiungere.
@@ -412,10 +412,10 @@ stage-word =
 
 ## Che effetto fa
 
-effect-land = { $after } { $unit } di libera se non si combina niente; aspettati { $range }, di solito si combina da un terzo a metà; misura domani.
-effect-land-molecular = Da { $molecularNow } a { $molecular } di molecolare: { $after } { $unit } di libera se non si combina niente; aspettati { $range }, di solito si combina da un terzo a metà; misura domani.
-effect-land-to-molecular = A { $molecular } di molecolare: { $after } { $unit } di libera se non si combina niente; aspettati { $range }, di solito si combina da un terzo a metà; misura domani.
-effect-land-low = { $after } { $unit } di libera se non si combina niente; sotto 10 di libera può combinarsi molta o tutta: aspettati { $range }, misura prima di aggiungere ancora.
+effect-land = { $after } { $unit } di libera se niente si combina; attesi { $range }, di solito si combina 1/3–1/2; misura domani.
+effect-land-molecular = Da { $molecularNow } a { $molecular } di molecolare: { $after } { $unit } di libera se niente si combina; attesi { $range }, di solito si combina 1/3–1/2; misura domani.
+effect-land-to-molecular = A { $molecular } di molecolare: { $after } { $unit } di libera se niente si combina; attesi { $range }, di solito si combina 1/3–1/2; misura domani.
+effect-land-low = { $after } { $unit } di libera se niente si combina; sotto 10 può combinarsi molta o tutta: attesi { $range }, misura prima di aggiungere ancora.
 effect-land-small = { $after } { $unit } di libera al massimo: il rialzo è meno dell’errore di una misura.
 effect-rise = La libera sale di circa { $range } { $unit }, di solito si combina da un terzo a metà; misura domani.
 effect-must = Il più si combina mentre il mosto fermenta: dopo non protegge il vino.
@@ -441,15 +441,15 @@ must-colour =
     }
 must-say-state = Com’è l’uva? Scrivi uva sana, uva danneggiata o marciume, e c’è una cifra da scegliere.
 button-published = Aggiungi { $add }
-effect-raise = + { $dose } { $unit } se non si combina niente; di solito si combina da un terzo a metà; misura domani.
+effect-raise = + { $dose } { $unit } se niente si combina; di solito si combina da un terzo a metà; misura domani.
 third-needs =
     { $third ->
         [more] ; se si combina un terzo serve una volta e mezza la dose
        *[covered] {""}
     }
-effect-allowance = Dose × { $factor } per + { $percent } %: arriva a { $after } { $unit } se si combina al massimo { $covers } %{ third-needs }. Aspettati { $range }; misura domani.
+effect-allowance = Dose × { $factor } per + { $percent } %: arriva a { $after } { $unit } se si combina al massimo { $covers } %{ third-needs }. Attesi { $range }; misura domani.
 effect-allowance-bare = Dose × { $factor } per + { $percent } %: copre una combinazione di { $covers } %{ third-needs }. Misura domani.
-effect-share = Dose ÷ (1 − { $share }): arriva a { $after } { $unit } se si combina proprio quella parte; aspettati { $range }; misura domani.
+effect-share = Dose ÷ (1 − { $share }): arriva a { $after } { $unit } se si combina proprio quella parte; attesi { $range }; misura domani.
 effect-share-bare = Dose ÷ (1 − { $share }): giusta se si combina proprio quella parte; misura domani.
 other-as-share = Se invece ne va perso { $percent } % (÷ { $divisor }): { bare-amount }.
 other-as-allowance = Come margine di + { $percent } % (× { $factor }): { bare-amount }.
@@ -497,11 +497,11 @@ solution-too-cold = No: { $wanted } g/L in acqua a { $water } °C. Pubblicato: {
 solution-colder = Sotto { $celsius } °C non ci sono cifre pubblicate: guarda che si sia sciolto tutto.
 solution-holding = Soluzione di conservazione, { $volume }: { $acid } di acido citrico, { $amount } di { additive }.
 solution-rinse = Risciacquo, { $volume }: { $acid } di acido citrico, { $amount } di { additive }.
-solution-order = Prima tutta l’acqua, poi l’acido, il metabisolfito per ultimo e poco per volta. Mai la polvere sull’acido.
-solution-air = Sprigiona SO2: arieggia, tieni lontano il viso, anche dal cocchiume.
-solution-for-holding = Per una barrique vuota e pulita, piena fino al cocchiume; controllala ogni poche settimane.
+solution-order = Prima tutta l’acqua, poi l’acido, infine il meta poco per volta. Mai polvere sull’acido.
+solution-air = Sprigiona SO2: arieggia, viso lontano, anche dal cocchiume.
+solution-for-holding = Per una barrique vuota e pulita, da riempire tutta; controllala ogni poche settimane.
 solution-for-rinse = Per attrezzi puliti: bagna tutto, lascia agire qualche minuto.
-solution-drain = Scaricala secondo le regole locali. Sciacqua con acqua prima di mettere vino.
+solution-drain = Scaricala come da norme locali. Sciacqua con acqua prima del vino.
 solution-practice = { $salt } e { $acid } g/L: pratica comune, senza fonte. Con una tua cifra: { $use ->
         [holding] soluzione di conservazione { $litres } L meta 1%
        *[rinse] risciacquo { $litres } L meta 1%
@@ -586,7 +586,12 @@ fact-strength =
         [SO2-per-100mL] { additive }, { $strength } % = { $strength } g di SO2 in 100 mL
        *[noted] { additive }, { $strength } %
     }
-assumed-additive = { additive } puro
+assumed-additive =
+    { $additive ->
+        [potassium-metabisulfite] metabisolfito di potassio puro
+        [sodium-metabisulfite] metabisolfito di sodio puro
+       *[other] { additive }
+    }
 assumed-target = obiettivo { target }
 assumed-target-red = obiettivo { target } (rosso)
 assumed-target-sweet = obiettivo { target } (dolce)
@@ -603,13 +608,13 @@ assumed-barrels =
     }
 note-free-unlabelled = “{ $text }” è la SO2 libera
 note-ph-unlabelled = “{ $text }” è il pH
-note-round-ph = un decimale senza nome è il pH
-note-round-free = una cifra senza nome è la SO2 libera
+note-round-ph = il decimale solo è il pH
+note-round-free = la cifra sola è la libera
 note-volume-sum = “{ $text }” sommati
 note-strength-as-salt = il titolo è in grammi di sale in 100 mL; in SO2 sarebbe { $factor } volte più forte
 note-strength-as-SO2 = il titolo è in grammi di SO2 in 100 mL
 note-mass-beside-readings = “{ $text }” sono grammi, non galloni
-note-each-or-total = “{ $text }” è di ciascuna
+note-each-or-total = “{ $text }” ciascuna
 note-unread-words = parole che non conosco, saltate: { $text }
 set-aside-figure = { $text }
 
@@ -667,7 +672,7 @@ target-of =
 
 ## A cosa non si può rispondere così
 
-problem-ph-out-of-range = { at }“{ $about }” non può essere il pH di un vino: accetto da 2,5 a 4,8. Manca una virgola? Scrivi così: pH 3,58
+problem-ph-out-of-range = { at }“{ $about }” non può essere il pH di un vino (da 2,5 a 4,8). Manca la virgola? Scrivi: pH 3,58
 problem-negative-value = { at }“{ $about }” è sotto zero, non può essere. Rimanda la cifra senza il meno.
 problem-total-below-free = { at }la totale è sotto la libera (“{ $about }”). Invertite? Scrivi: libera { $one } totale { $two }
 problem-volume-not-positive = { at }un volume di “{ $about }” non esiste. Scrivi così: 55 hl
@@ -764,7 +769,7 @@ warning-total-over-limit =
         [known] ⚠ La totale diventerebbe { $total_after_mg_L }, oltre { $limit_mg_L } { $unit } ({ rule-short }{ limit-doubt }){ law-decides }: chiedi prima.
        *[at-least] ⚠ La totale diventerebbe almeno { $total_after_mg_L }, oltre { $limit_mg_L } { $unit } ({ rule-short }{ limit-doubt }){ law-decides }: chiedi prima.
     }
-warning-free-over-limit = ⚠ La libera può arrivare a { $free_after_mg_L } se non si combina niente, oltre il limite di libera { $limit_mg_L } { $unit } ({ rule-short }{ limit-doubt }){ law-decides }: chiedi prima.
+warning-free-over-limit = ⚠ La libera può arrivare a { $free_after_mg_L } se niente si combina, oltre il limite di libera { $limit_mg_L } { $unit } ({ rule-short }{ limit-doubt }){ law-decides }: chiedi prima.
 warning-label-threshold =
     ⚠ Etichetta ({ law-of }): i solfiti si dichiarano { $comparator ->
         [more] oltre
@@ -820,16 +825,16 @@ cautions = ⚠ { $list }
 caution-trained-people-with-breathing-apparatus = Solo personale formato, autorespiratore a portata di mano.
 caution-grapes-and-must-only = Solo per uve e mosti.
 caution-ventilate = Arieggia.
-caution-never-lean-in = Mai sporgersi dentro una vasca.
+caution-never-lean-in = Mai sporgersi nelle vasche.
 caution-gloves-goggles = Guanti, occhiali.
-caution-no-acid-no-chlorine = Mai con acidi o detergenti al cloro.
-caution-no-other-acid-no-chlorine = Nessun altro acido, niente detergenti al cloro.
-caution-asthma = Non per chi ha l’asma.
+caution-no-acid-no-chlorine = Mai con acidi o cloro.
+caution-no-other-acid-no-chlorine = Nessun altro acido, niente cloro.
+caution-asthma = Non per asmatici.
 caution-crush-first = Sbriciola, sciogli in poco vino o acqua.
 caution-dissolve-first = Sciogli prima in poco vino o acqua.
-caution-foams-with-carbon-dioxide = Un vino pieno di CO2 trabocca di schiuma.
-caution-mix-and-measure-again = Rimescola, misura dopo un giorno.
-caution-label-and-rules-first = Prima l’etichetta, le regole locali, una persona qualificata.
+caution-foams-with-carbon-dioxide = Vino pieno di CO2: trabocca.
+caution-mix-and-measure-again = Mescola, misura il giorno dopo.
+caution-label-and-rules-first = Prima: etichetta, norme locali, un tecnico.
 cautions-of = ⚠ { additive }: { $list }
 cautions-short = ⚠ Cautele come prima: tasto Sicurezza.
 
@@ -1052,7 +1057,7 @@ step-so2-in-amount = SO2 che contiene, quantità × SO2 di un’unità:
 step-added-concentration = Aggiunta, SO2 × 1000 ÷ volume:
 step-added-by-rate = Aggiunta, dose × parte di SO2:
 step-mass-by-rate = Prodotto, dose × volume ÷ 1000:
-step-free-after = Libera dopo, se non si combina niente:
+step-free-after = Libera dopo, se niente si combina:
 step-molecular-after = Molecolare dopo, libera ÷ (10^(pH − pK) + 1):
 step-salt-mass = Sale, grammi in 0,1 L ÷ 0,1 L × volume:
 step-added-by-one-millilitre = Un mL in una barrique, SO2 che contiene ÷ volume della barrique:
@@ -1158,13 +1163,13 @@ round-red = “Se rosso” è per { $red } di molecolare.
 round-stock = Come sua soluzione { $strength } %: { $list }.
 round-rest = Il resto come soluzione { $strength } %: { $list }.
 round-stock-of = { $vessel } { $amount }
-mixed-sample = Questo vale per la media di { $count }: un campione misto non mostra la più bassa. Quanto siano diverse non è in archivio; una più bassa di 5 resta più bassa di 5. Misurane alcune una per una prima di dosarle tutte (pratica comune, senza fonte).
+mixed-sample = Vale per la media di { $count }: un campione misto nasconde la più bassa; di quanto, non si sa: una più bassa di 5 resta più bassa di 5. Misurane alcune prima di dosarle tutte (pratica comune, senza fonte).
 round-mixed = ⚠ Un campione misto dice la media e non la più bassa: { $list }. Misurane alcune una per una.
 round-low = ⚠ Sotto 10 di libera può combinarsi molta o tutta: { $list }. Lì misura prima di aggiungere ancora.
 round-name = { $name }
 round-again = Rimanda intera ogni riga che non si è potuta leggere.
 round-total =
-    In tutto { $list }: le { $count } quantità arrotondate, sommate.
+    In tutto { $list }: somma delle { $count } arrotondate.
 round-total-of =
     { $kind ->
         [tablet] { $amount } pastiglie effervescenti da { $size } g di SO2
@@ -1223,7 +1228,7 @@ sheet-measure = Misurare mL
 sheet-tablets = Pastiglie
 sheet-additive = Prodotto
 sheet-strength = Titolo %
-sheet-after = Libera dopo, se non si combina niente mg/L
+sheet-after = Libera dopo, se niente si combina mg/L
 sheet-note = Nota
 sheet-done = Fatto
 sheet-in-all = In tutto
@@ -1305,7 +1310,7 @@ ask-volume-which =
     }
 read-kept =
     { $new ->
-        [new] Annotato, { $vessel } per me è nuova: { $list }.
+        [new] Annotato ({ $vessel } è nuova): { $list }.
        *[known] Letto e annotato: { $list }.
     }
 noted-something-else =
@@ -2197,7 +2202,7 @@ range-dose = { $vessel ->
     }, cioè { $low }–{ $high } { $unit } di SO2
 }.
 range-sure = Dopo la dose sei sicuro di { $molecular } { $unit } di molecolare, se si combina quanto calcolato.
-range-sure-unbound = Se non si combina niente, dopo la dose sei sicuro di { $molecular } { $unit } di molecolare.
+range-sure-unbound = Se niente si combina, dopo la dose sei sicuro di { $molecular } { $unit } di molecolare.
 range-sure-low = Sotto 10 { $unit } di libera una dose può combinarsi tutta: sicuri sono solo { $molecular } { $unit } di molecolare. Misura dopo un giorno.
 range-rests = Con pH ± { $ph } e libera ± { $free } { $unit }{ $said ->
     [both] .

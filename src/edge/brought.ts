@@ -10,6 +10,8 @@ export interface BroughtFile {
 /** What an errand brings back: something to say, and perhaps a file to hand over. */
 export interface Brought {
   readonly said: readonly Said[];
+  /** It went wrong, and what is said tells so. */
+  readonly isFailed?: true;
   readonly file?: BroughtFile;
   /** The files after the first, where it is several pictures. */
   readonly more?: readonly BroughtFile[];

@@ -32,7 +32,7 @@ export function makeRunErrand(
       return await runErrand(errand, message, errands);
     } catch (fault) {
       errands.report(fault);
-      return { said: [saying('errand-failed', {}, message, errands.say)] };
+      return { said: [saying('errand-failed', {}, message, errands.say)], isFailed: true };
     }
   };
 }

@@ -1,3 +1,5 @@
+import { chatLanguageKey, languageKey } from '../../chat/conversation/keys.ts';
+import { languagesOf } from '../../chat/conversation/languages-of.ts';
 import type { Handle } from '../../chat/conversation/ports.ts';
 import type { Settings } from '../../chat/conversation/settings.ts';
 import type { Say } from '../../chat/replies/say.ts';
@@ -53,7 +55,17 @@ export function joinConversation(parts: ConversationParts): Conversation {
   return {
     serve: makeServeTurn(serving),
     serveDue: makeServeDue({ say, store, settings, door }),
-    fileWork: { runErrand, settings, isAdmitted: async (message) => isInside(await door.admit(message)) },
+    fileWork: {
+      runErrand,
+      settings,
+      isAdmitted: async (message) => isInside(await door.admit(message)),
+      languageOf: async (message) => {
+        const { present } = await registry.cellarsOfChat(message.chat);
+        const keys = [languageKey(message), chatLanguageKey(message.chat)];
+        const kept = await store.look(present, (view) => view.keptOf(keys));
+        return languagesOf(message, kept).language;
+      },
+    },
     typedWork: makeTypedWork({ say, settings, rule, registry, now: clock.now }),
     migrateChat: registry.migrateChat,
   };

@@ -17,7 +17,7 @@ import { chatNameOf } from './who-of.ts';
 export interface MailOptions
   extends
     Omit<AnswerOptions, 'send' | 'sendNow' | 'tellTapSeen' | 'store' | 'files'>,
-    Pick<CarryOptions, 'fileWork' | 'config'>,
+    Pick<CarryOptions, 'fileWork' | 'config' | 'progress_s'>,
     Pick<TypedOptions, 'typedWork'> {
   readonly me: Me;
   /** A group goes by another name; resolves when its cellar has gone with it. Names are the conversation's. */

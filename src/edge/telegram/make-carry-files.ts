@@ -1,5 +1,6 @@
 import type { IncomingMessage } from '../../chat/conversation/ports.ts';
 import { nothingRead } from '../../chat/attachments/import-read.ts';
+import type { Language } from '../../chat/reader/understood.ts';
 import type { Settings } from '../../chat/conversation/settings.ts';
 import type { Said, Say } from '../../chat/replies/say.ts';
 import type { Clock } from '../clock.ts';
@@ -12,6 +13,7 @@ import { fetchFile } from './fetch-file.ts';
 import type { Platform } from './platform.ts';
 import { LONGEST_CAPTION, sendFile, type FileSending } from './send-file.ts';
 import { whileTyping, type Doing } from './while-typing.ts';
+import { withProgress } from './with-progress.ts';
 
 /** What has to do with files, as the program joins it. */
 export interface FileWork {
@@ -20,6 +22,8 @@ export interface FileWork {
   readonly settings: Settings;
   /** Whether a sheet of this message is worth fetching: a stranger's is not. */
   readonly isAdmitted: (message: IncomingMessage) => Promise<boolean>;
+  /** The language in which somebody is spoken to. */
+  readonly languageOf: (message: IncomingMessage) => Promise<Language>;
 }
 
 /** What carrying files needs. */
@@ -33,6 +37,14 @@ export interface CarryOptions {
   readonly log: Log;
   readonly pass: FileSending['pass'];
   readonly signal: AbortSignal;
+  /** After so long somebody who waits is told. */
+  readonly progress_s: number;
+}
+
+/** What an errand leaves to be said. */
+interface Outcome {
+  readonly said: readonly Said[];
+  readonly isFailed: boolean;
 }
 
 /** What is shown while an errand is done. */
@@ -68,26 +80,39 @@ export function makeCarryFiles(options: CarryOptions): CarryFiles {
       const { message } = arrival;
       if (work === undefined || !(await work.isAdmitted(message))) return message;
       const reading = contentOf(arrival, work);
-      const content = await whileTyping({ ...arrival, doing: 'typing' }, reading, sending);
-      return { ...message, content };
+      const typing = whileTyping({ ...arrival, doing: 'typing' }, reading, sending);
+      const language = await work.languageOf(message);
+      const long = { spot: arrival, language, work: typing, failureOf: () => undefined };
+      return { ...message, content: (await withProgress(long, sending)).result };
     },
     run: async (arrival, errand, message) => {
-      if (work === undefined) return [failed(message)];
+      const inLanguage = { ...message, language: errand.language };
+      if (work === undefined) return [failed(inLanguage)];
+      const notSent: Outcome = { said: [failed(inLanguage)], isFailed: true };
       const doing = DOING[errand.kind] ?? 'typing';
-      const running = (async (): Promise<readonly Said[]> => {
-        const { said, file, more = [] } = await work.runErrand(errand, message);
-        if (file === undefined) return said;
+      const running = (async (): Promise<Outcome> => {
+        const { said, file, more = [], isFailed = false } = await work.runErrand(errand, inLanguage);
+        if (file === undefined) return { said, isFailed };
         const [first] = said;
         const isBeside =
           said.length === 1 && first?.buttons.length === 0 && first.text.length <= LONGEST_CAPTION;
         const caption = isBeside && first !== undefined ? { caption: first.text } : {};
         const isSent = await sendFile({ file, spot: arrival, ...caption }, sending);
-        if (!isSent) return [failed(message)];
-        for (const one of more)
-          if (!(await sendFile({ file: one, spot: arrival }, sending))) return [failed(message)];
-        return isBeside ? [] : said;
+        if (!isSent) return notSent;
+        for (const one of more) if (!(await sendFile({ file: one, spot: arrival }, sending))) return notSent;
+        return { said: isBeside ? [] : said, isFailed: false };
       })();
-      return whileTyping({ ...arrival, doing }, running, sending);
+      const { result, isTold } = await withProgress(
+        {
+          spot: arrival,
+          language: errand.language,
+          work: whileTyping({ ...arrival, doing }, running, sending),
+          failureOf: (outcome) => (outcome.isFailed ? 'errand-failed' : undefined),
+        },
+        sending,
+      );
+      // The line that told of it says so already.
+      return result.isFailed && isTold ? [] : result.said;
     },
   };
 }

@@ -57,6 +57,8 @@ export interface Times {
   readonly callTimeout_s: number;
   readonly sendTimeout_s: number;
   readonly watchdog_s: number;
+  /** Somebody who waits for a file longer than this is told that it is worked on. */
+  readonly progress_s: number;
   /** After the signal: for what is in hand, then for telling the platform. Together within 8 s. */
   readonly finish_s: number;
   readonly confirm_s: number;
@@ -67,6 +69,7 @@ const USUAL_TIMES: Times = {
   callTimeout_s: 45,
   sendTimeout_s: 20,
   watchdog_s: 60,
+  progress_s: 0.5,
   finish_s: 6,
   confirm_s: 1.5,
 };
@@ -91,7 +94,17 @@ export async function serveTelegram(options: TelegramOptions): Promise<void> {
     if (me === undefined) return;
     const receipts = createReceipts(await readReceipts(store));
     const { meter } = door;
-    const mail = joinMail({ ...options, me, platform, limits, meter, receipts, signal: giveUp.signal });
+    const { progress_s } = times;
+    const mail = joinMail({
+      ...options,
+      me,
+      platform,
+      limits,
+      meter,
+      receipts,
+      progress_s,
+      signal: giveUp.signal,
+    });
     const { inbox, outbox } = mail;
     door.watch(mail);
     void showCommands({ ...options, platform });

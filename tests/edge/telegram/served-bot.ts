@@ -57,6 +57,7 @@ export function serveBot(root: string, changes: BotChanges = {}): ServedBot {
       callTimeout_s: 20,
       sendTimeout_s: 20,
       watchdog_s: 1e6,
+      progress_s: 1e6,
       finish_s: 1e4,
       confirm_s: 1e4,
       ...changes.times,
