@@ -42,7 +42,8 @@ const OF_ONES_WINE: readonly FieldName[] = [
 ]; // prettier-ignore
 
 function isOfOnesWine({ intent, fields, command }: Draft): boolean {
-  if (intent === 'added' || intent === 'reading' || intent === 'titration') return true;
+  // `added meta and free barely moved, why`: an addition without vessel or amount may be one; its fields tell, below.
+  if (intent === 'reading' || intent === 'titration') return true;
   // `remove sulfite from wine` reads as a person to be taken out; every other word of the bot's own is one.
   if (command !== undefined && command.name !== 'remove-person') return true;
   return OF_ONES_WINE.some((name) => fields[name] !== undefined);

@@ -286,7 +286,7 @@ export const en: Words = {
       'fermented out', 'fermentation is complete', 'done with primary', 'through primary', "isn't fermenting",
       'primary complete', 'primary is done', 'primary over',
     ],
-    'cue:fruit': ['grapes', 'grape', 'fruit', 'berries', 'clusters', 'bunches'],
+    'cue:fruit': ['grapes', 'grape', 'fruit', 'berries', 'clusters', 'bunches', 'made with organic grapes', 'made from organic grapes'],
     'cue:wine': ['wine', 'juice', 'must', 'wines'],
     'cue:verb': [
       'be', 'have', 'do', 'add', 'get', 'go', 'not', 'i', 'we', 'you', 'it', 'say', 'admit', 'check',
@@ -465,7 +465,7 @@ export const en: Words = {
       'dealcoholised', 'dealcoholized', 'de alcoholised', 'de alcoholized', 'dealcoholised wine', 'dealcoholized wine',
     ],
     organic: [
-      'organic', 'organics', 'bio', 'organically grown', 'organc', 'certified organic', 'biodynamic organic',
+      'organic', 'organics', 'bio', 'organically grown', 'organc', 'made with organic grapes', 'made from organic grapes', 'certified organic', 'biodynamic organic',
       'ecologico', 'biologico',
     ],
     'stage:must': [
@@ -982,7 +982,8 @@ export const en: Words = {
   },
   questions: {
     'stop-fermentation': [
-      'stop|stops|kill|kills|halt|arrest & ferment|fermentation|fermenting|yeast|yeasts',
+      'stop|stops|kill|kills|halt|arrest & ferment|fermentation|fermenting|yeast|yeasts & !delivery|order|pump',
+      'stop it|halt it|arrest it & brix|plato|oechsle|baume|sweet|sugar & meta|kmbs|sulfite|sulphite|so2|sulfur|sulphur',
       'keep|bottle|leave & sweet|some sugar|residual sugar & sulfite|sulphite|so2|sulfur|meta & can|just|enough|will|if',
     ],
     sorbate: ['sorbate|sorbates'],
@@ -993,11 +994,12 @@ export const en: Words = {
       'asthma*|people|pregnant|health|healthy|poisonous|toxic|hangover* & sulfite*|sulphite*|so2 & is|are|do|does|can|bad|dangerous|safe',
     ],
     gas: [
+      'licence|license|licensed|permit & so2|sulfur|sulphur|cylinder|gas & !label|sell',
       'so2 gas|so2 cylinder|sulfur cylinder|sulfur dioxide gas|sulphur dioxide gas|gas cylinder|liquid so2|gas bottle|cylinder of so2 & can|who|is|do|does|how|may|need|what|training|allowed|dangerous|safely|handle',
     ],
     'potassium-or-sodium': [
       'sodium|smbs|na meta|na-meta & potassium|kmbs|k meta|k-meta|pot meta',
-      'sodium|smbs|na meta|na-meta & can|why|is|ok|may|allowed|what|difference',
+      'sodium|smbs|na meta|na-meta & can|why|is|ok|may|allowed|what|difference & !blood|doctor|salt',
     ],
     law: [
       'legal|legally|law|laws|allowed|permitted|maximum|max|regulation|regulations & so2|sulfite*|sulphite*|sulfur|sulphur|wine & what|whats|how|is|legal|which|does|limit|maximum|max & !training|gas',
@@ -1015,19 +1017,25 @@ export const en: Words = {
       'malo|mlf|malolactic|ml & when|soon|wait|ok|should|how do i know|can i|how long & sulfite|sulphite|so2|sulfur|sulphur|meta|kmbs|add',
     ],
     'no-sulfite': [
+      'why do we|why do you|why does anyone|why even|why bother & sulfite|sulphite|sulfiting|sulphiting & !add more|twice',
       'without|no|instead of|not using|skip & sulfite|sulfites|sulphite|sulphites|so2|sulfur|sulphur & can|what|is|do|possible|safe|happens|why|else & !sorbate|tablets|powder|small|sodium',
       'really need|have to use|necessary|do i need|need to add|why add|why use & sulfite|sulfites|sulphite|sulphites|so2|sulfur|sulphur & !sorbate|training|gas|ph|measure|test|before bottling',
     ],
     'which-figure': [
+      'care about|worry about|bother with & total|free|molecular & so2|sulfite|sulphite|sulfur|sulphur & does|do|should|anyone|why|who',
+      'what\'s|whats|what is & bound|free|molecular & sulfur dioxide|sulphur dioxide & !aim|limit|max|maximum|legal',
       'free & total|molecular|bound & which|what|whats|difference|counts|matters|look at|go by',
       'bound so2|bound sulfur|bound sulphur|bound sulfite & what|whats|is|why|does',
       'what does molecular|what is molecular|whats molecular|molecular so2 mean|what does free so2 mean|what is free so2',
     ],
     'which-yield': [
+      'how many grams|how much & so2|sulfur|sulphur & gram of|in a gram|per gram & meta|kmbs|metabisulfite|metabisulphite',
       '57|57.6|57.5|58 & 50|yield|why|half',
       'how much so2|how much sulfur|what share|what percent|what percentage|yield & in|of|for & meta|kmbs|metabisulfite|metabisulphite|k-meta|campden',
     ],
     'old-powder': [
+      'lose strength|loses strength|lost strength|lose its strength|lose power|get weaker & meta|kmbs|metabisulfite|metabisulphite|sulfite|sulphite|powder & does|do|is|has|can|how',
+      'tub|bag|bucket|jar|box|packet & meta|kmbs|metabisulfite|metabisulphite|powder & open|opened|years|months & ok|okay|use|good|still|throw & !stock|ordered|bought',
       'old|last year|last years|last year\'s|years|year|go off|goes off|expire*|clumpy|clumped|open all|keep|keeps|weaker|shelf life|lumpy|hard|gone off|still good|still ok & kmbs|meta|metabisulfite|metabisulphite|sulfite|sulphite|powder|bag|pot meta|campden & can|is|does|do|how long|still|what|was & !solution|stock|every|vat',
     ],
     'tablets-or-powder': [
@@ -1035,7 +1043,8 @@ export const en: Words = {
       'powder & tablets|tablet & !g',
     ],
     teaspoons: [
-      'teaspoon|teaspoons|tsp|spoon|spoons|spoonful|tablespoon & how|can|what|is|does|use|weigh|many|measure',
+      'teaspoon|teaspoons|tsp|spoon|spoons|spoonful|tablespoon & how|can|what|is|does|use|weigh|many|measure & !drawer|sink|missing|lost',
+      'don\'t own|dont own|don\'t have|dont have|have no|haven\'t got & scale|scales|balance & what|how|can',
       'no balance|no scale|no scales|without a scale|without a balance|don\'t have a scale|dont have a scale & how|can|what',
     ],
     'strip-reads-otherwise': [
@@ -1044,19 +1053,25 @@ export const en: Words = {
       'which method|what method|best method|best way to measure|most accurate & so2|free|sulfite|sulphite|sulfur|sulphur',
     ],
     'fell-short': [
+      'where & disappear|disappears|disappearing|vanish|vanishes & so2|sulfite|sulphite|sulfur|sulphur|free',
+      'barely moved|hardly moved|barely rose|hardly rose|didn\'t move|didnt move|did not move|didn\'t budge & free|so2 & why|how|what',
       'why & lower|less|not|didn\'t|didnt|only|drop|drops|dropped|fall|fell|low & free|so2|you said|up|planned|target|addition',
       'where & so2|sulfite|sulphite|sulfur|sulphur & go|gone|went|going & !tank',
       'fell short|came up short|came in low|below target|less than planned|lower than planned|missed the target & why|what|how|happened',
     ],
     'how-often': [
+      'how many weeks|how many days|how many months|how long & before testing|between tests|between checks|without testing|without checking|before checking & so2|free|barrel|barrels|tank|tanks',
+      'weekly|monthly|daily|every day & check|checks|test|tests|testing|measure|measuring & do|does|should|is|need & so2|free|barrel|barrels|tank|tanks',
       'how often|how frequently|how regularly|every how|how many times|once a month|every week|every month|each week & measure|measured|test|tested|check|checked|so2|free & !racking|add a',
     ],
     'small-or-large': [
+      'in one go|all at once|in one hit & spread|in steps|bit by bit|over the month|several & meta|kmbs|sulfite|sulphite|so2|it & would|should|can|is|or',
       'small|little|bit|split|several|many & big|large|one|once|doses|dose|additions|why|not & or|better|should|why|can|instead & so2|sulfite|sulphite|sulfur|dose|doses|addition|additions|all in|racking & !powder|tablets',
       'all in at once|all at once & can|is|should|bit|or & !drink',
       'one big|one large & dose|addition|or',
     ],
     'when-to-measure': [
+      'an hour|hours|a day|overnight|next day & enough|long enough|too soon & retest|recheck|test|measure|check & is|would',
       'when|how soon|how long|same day|after how|wait & measure|test|check|reading|retest|recheck & after|again|wait|same day|since|stable & !malo|mlf|yeast',
     ],
     'how-to-mix': [
@@ -1070,6 +1085,7 @@ export const en: Words = {
       'how many mg|how many ppm|how much is one|how do i turn|how do you turn|convert & g/hl|g / hl|g hl|gram per hectolitre|grams per hectolitre',
     ],
     'pH-matters': [
+      'without a ph|without ph|without the ph|no ph & can|why|how & dose|work it out|tell|calculate|reckon|you & !meter',
       'ph & why|what has|have to|really need|need to|matter|matters & so2|sulfite|sulphite|sulfur|sulphur|need|measure|matter|matters',
     ],
     bottling: [
@@ -1080,6 +1096,7 @@ export const en: Words = {
       'which|what & molecular|target|free so2|level of free|level of so2|free sulfur & aim|should|use|for|good|have|right|need',
     ],
     'too-much': [
+      'stinks|reeks|smells|stings & sulfur dioxide|sulphur dioxide|so2|sulfite|sulphite|struck match & fix|what|how|help|do i',
       'overdosed|over dosed|oversulfited|over sulfited & what|how|help',
       'too much|excess|over sulfited|oversulfited|over dosed|overdosed & so2|sulfite|sulphite|sulfur|sulphur|meta|it',
       'lower|reduce|remove|get rid|take out|bring down|bring the free down|get the free down|smells of & so2|sulfite|sulphite|sulfur|sulphur|free|matches & how|can|does|what|wine',
