@@ -4,6 +4,7 @@
 ## Pezzi che servono ad altre frasi
 
 list-separator = {", "}
+barrel-name = barrique
 cautions-separator = {" "}
 dose-in-all-separator = {" e "}
 cautions-of-separator = {" "}
@@ -75,7 +76,7 @@ tablets-of =
         [tablet] { $amount } { $unit ->
             [tablet] pastiglia effervescente
            *[tablets] pastiglie effervescenti
-        } ({ $size } g di SO2 l’una)
+        } da { $size } g di SO2
        *[other] { $amount } { tablet-word } da { $size } g di { additive }
     }
 measured =
@@ -427,7 +428,7 @@ must-published =
         [read] Pubblicato: { $list } ({ $source }).
        *[memory] Pubblicato: { $list } ({ $source }; a memoria, non letto).
     }
-must-none-published = Le cifre in archivio sono pubblicate per l’uva; per { fact-product } non ce n’è.
+must-none-published = Le cifre in archivio sono pubblicate per l’uva; per questo ({ fact-product }) non ce n’è.
 must-range =
     { $state ->
         [sound] { must-colour }uva sana { $range }
@@ -1469,7 +1470,7 @@ event-said =
         }
         [emptied] { " " }vuota
         [lot] { " " }è { $lot }
-        [later] , nessun controllo prima: { $until }
+        [later] , controllo rinviato: { $until }
         [unwatched] , niente più controlli
         [watched] , di nuovo controlli
         [forgotten] { " " }dimenticata
@@ -2089,9 +2090,9 @@ stock-lot =
        *[other] { " " }da { $supplier }
     }
 stock-negative = ⚠ { stock-of }: per il registro { $amount }{ stock-tablets }: è arrivato qualcosa che non è annotato. Annotalo, o conta: giacenza meta 3,2 kg
-stock-low = ⚠ Sta finendo: in magazzino { $amount }{ stock-tablets } di { stock-of }.
-stock-left = In magazzino ora: { $amount }{ stock-tablets } di { stock-of }.
-stock-short = ⚠ In magazzino per il registro: { $amount }{ stock-tablets } di { stock-of }, meno di quanto serve.
+stock-low = ⚠ Sta finendo: { stock-of }, in magazzino { $amount }{ stock-tablets }.
+stock-left = { stock-of }: in magazzino ora { $amount }{ stock-tablets }.
+stock-short = ⚠ { stock-of }: per il registro in magazzino { $amount }{ stock-tablets }, meno di quanto serve.
 stock-old = ⚠ È lì da oltre un anno: un sacco aperto perde forza (pratica comune, senza fonte). Dopo misura la libera.
 stock-oldest-lot =
     { $lot ->
