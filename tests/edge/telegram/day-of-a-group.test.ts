@@ -84,8 +84,8 @@ test('a day of a group with five people: it speaks when it is called, to each of
 test('a sheet that is sent to the chat is shown, then taken', async () => {
   await using scene = await openScene();
   const { api, serve } = scene;
-  // A second of ours is a quarter of an hour on the clock here, and what is shown can be taken for one hour.
-  const rosa = new Person(api, 7001, { begun_s: Math.round(hastyClock.now() / 1000) + 3000 });
+  // A second of ours is a quarter of an hour on the clock here, and what is shown can be taken for an hour: hers is ahead.
+  const rosa = new Person(api, 7001, { begun_s: Math.round(hastyClock.now() / 1000) + 30_000 });
   serve(wholeBot());
   const bytes = new TextEncoder().encode(
     'vessel,volume,colour\nT1,20 hl,white\nT2,30 hl,red\nnothing here\n',
