@@ -4,6 +4,7 @@
 ## Pieces that other sentences use
 
 list-separator = {", "}
+barrel-name = Fass
 cautions-separator = {" "}
 dose-in-all-separator = {" und "}
 cautions-of-separator = {" "}

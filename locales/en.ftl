@@ -4,6 +4,7 @@
 ## Pieces that other sentences use
 
 list-separator = {", "}
+barrel-name = barrel
 cautions-separator = {" "}
 dose-in-all-separator = {" and "}
 cautions-of-separator = {" "}

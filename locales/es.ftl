@@ -4,6 +4,7 @@
 ## Piezas que usan otras frases
 
 list-separator = {", "}
+barrel-name = barrica
 cautions-separator = {" "}
 dose-in-all-separator = {" y "}
 cautions-of-separator = {" "}

@@ -54,7 +54,7 @@ at =
 for-each =
     { $count ->
         [one] {""}
-       *[other] {" "}pour chacun
+       *[other] {" "}chacun
     }
 target =
     { $kind ->
@@ -357,15 +357,15 @@ choice-head = { at }un choix, pas une dose : à pH { $ph }, { $target } molécu
 choice-leave = { $mark } Laisser : { $free } de libre, c’est { $molecular } moléculaire.
 choice-to =
     { $total ->
-        [unknown] { $mark } À { $free } ({ $molecular } moléculaire) : { measured } ; mesurer d’abord le total
-       *[known] { $mark } À { $free } ({ $molecular } moléculaire) : { measured }
+        [unknown] { $mark } À { $free } ({ $molecular } moléc.) : { measured } ; total à mesurer
+       *[known] { $mark } À { $free } ({ $molecular } moléc.) : { measured }
     }
-choice-no-amount = – À { $free } ({ $molecular } moléculaire) : pas de quantité : le total dépasserait { $limit } ({ law-of }).
+choice-no-amount = – À { $free } ({ $molecular } moléc.) : rien : le total dépasserait { $limit } ({ law-of }).
 choice-red =
     { $kind ->
-        [none] Si c’est un rouge, { $red } demande { $free } de libre : rien à ajouter.
-        [over] Si c’est un rouge, { $red } demande { $free } de libre : pas de quantité, le total dépasserait { $limit } ({ law-of }).
-       *[other] Si c’est un rouge, { $red } demande { $free } de libre : { bare-amount }.
+        [none] Si rouge, { $red } demande { $free } libre : rien à ajouter.
+        [over] Si rouge, { $red } demande { $free } libre : pas de quantité, le total dépasserait { $limit } ({ law-of }).
+       *[other] Si rouge, { $red } demande { $free } libre : { bare-amount }.
     }
 ways-out = Sinon : plus froid, plus propre, plus de contrôles ; acidifier : voir avec un œnologue.
 
@@ -384,9 +384,9 @@ bottling-measured-none = Mesuré dans la filière (non confirmé), c’est { $ea
 condition-stage = Seulement si la malo est finie ou non voulue.
 condition-red =
     { $kind ->
-        [none] Si c’est un rouge ({ $red } moléculaire) : rien à ajouter.
+        [none] Si rouge ({ $red } moléculaire) : rien à ajouter.
         [over] Si rouge ({ $red } moléculaire) : { bare-amount }, aussi au-dessus de { $limit }.
-       *[other] Si c’est un rouge ({ $red } moléculaire) : { bare-amount }.
+       *[other] Si rouge ({ $red } moléculaire) : { bare-amount }.
     }
 no-dose-fermenting = { at }pas de sulfite maintenant, ça fermente encore.
 no-dose-malolactic = { at }pas de sulfite maintenant, la malo est à venir.
@@ -826,7 +826,7 @@ caution-grapes-and-must-only = Pour raisin et moût seulement.
 caution-ventilate = Ventiler.
 caution-never-lean-in = Ne jamais se pencher dans une cuve.
 caution-gloves-goggles = Gants, lunettes.
-caution-no-acid-no-chlorine = Jamais d’acide ni de chlore avec.
+caution-no-acid-no-chlorine = Jamais avec acide ou chlore.
 caution-no-other-acid-no-chlorine = Aucun autre acide, pas de chlore.
 caution-asthma = Pas pour asthmatiques.
 caution-crush-first = Écraser, dissoudre dans un peu de vin ou d’eau.
@@ -1309,7 +1309,7 @@ ask-volume-which =
     }
 read-kept =
     { $new ->
-        [new] { $vessel }, première fois, gardé : { $list }.
+        [new] { $vessel }, nouveau, gardé : { $list }.
        *[known] Lu et gardé : { $list }.
     }
 noted-something-else =

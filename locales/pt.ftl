@@ -4,6 +4,7 @@
 ## Peças que outras frases usam
 
 list-separator = {", "}
+barrel-name = barrica
 cautions-separator = {" "}
 dose-in-all-separator = {" e "}
 cautions-of-separator = {" "}
@@ -1157,7 +1158,7 @@ round-red = «Se for tinto» é para { $red } molecular.
 round-stock = Como solução dele a { $strength } %: { $list }.
 round-rest = O resto como solução a { $strength } %: { $list }.
 round-stock-of = { $vessel } { $amount }
-mixed-sample = É a média das { $count }: uma amostra misturada não mostra a mais baixa. Quanto diferem não sei; a que está 5 abaixo fica 5 abaixo. Mede algumas à parte primeiro (prática comum, sem fonte).
+mixed-sample = É a média das { $count }: não mostra a mais baixa. Quanto diferem não sei; a que está 5 abaixo fica 5 abaixo. Mede algumas à parte primeiro (prática comum, sem fonte).
 round-mixed = ⚠ Uma amostra misturada dá a média e não a mais baixa: { $list }. Mede algumas à parte.
 round-low = ⚠ Abaixo de 10 de livre pode combinar-se muito ou tudo: { $list }. Aí mede antes de voltar a adicionar.
 round-name = { $name }

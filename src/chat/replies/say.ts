@@ -31,11 +31,30 @@ function format(bundles: readonly FluentBundle[], { key, values, list }: Sentenc
   const bundle = bundles.find((one) => one.getMessage(key)?.value);
   const pattern = bundle?.getMessage(key)?.value;
   if (!bundle || !pattern) throw new TypeError(`Cannot say "${key}" as no language has that sentence`);
-  const args = list ? { ...values, list: joined(bundles, key, list) } : values;
+  const args = { ...withNames(bundles, values), ...(list && { list: joined(bundles, key, list) }) };
   const faults: Error[] = [];
   const text = bundle.formatPattern(pattern, args, faults);
   if (faults.length > 0) throw new TypeError(`Cannot say "${key}": ${faults[0]?.message}`);
   return text;
+}
+
+/** Values that are names of vessels: what is kept as `barrel 17` is called in each language as it is there. */
+const NAMES: ReadonlySet<string> = new Set(['vessel', 'vessels', 'other', 'to']);
+
+const KEPT_BARREL = /\bbarrel (?=\d)/g;
+
+function withNames(bundles: readonly FluentBundle[], values: Line['values']): Line['values'] {
+  const isBarrel = Object.entries(values).some(
+    ([name, value]) => NAMES.has(name) && typeof value === 'string' && value.includes('barrel '),
+  );
+  if (!isBarrel || !bundles.some((one) => one.hasMessage('barrel-name'))) return values;
+  const word = format(bundles, { key: 'barrel-name', values: {} });
+  return Object.fromEntries(
+    Object.entries(values).map(([name, value]) => [
+      name,
+      NAMES.has(name) && typeof value === 'string' ? value.replaceAll(KEPT_BARREL, `${word} `) : value,
+    ]),
+  );
 }
 
 /** The parts of a list, with the separator of that sentence or the usual one between them. */

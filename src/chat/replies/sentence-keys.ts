@@ -54,6 +54,7 @@ export interface SentenceValues {
   'backup-elsewhere': never;
   'backup-written': 'path';
   'bare-amount': 'amount' | 'count' | 'unit';
+  'barrel-name': never;
   'basis-oiv': 'celsius' | 'pK' | 'percent';
   'basis-oiv-need': 'celsius' | 'free' | 'pK' | 'percent';
   'blend-bound-free': 'limit';
