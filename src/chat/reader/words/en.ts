@@ -988,6 +988,7 @@ export const en: Words = {
     ],
     sorbate: ['sorbate|sorbates'],
     allergy: [
+      'bad for|harmful|unhealthy|dangerous for|good for & you|me|people|health|kids|us & sulfite|sulfites|sulphite|sulphites|so2 & are|is|how|do|does|can',
       'allerg* & sulfite*|sulphite*|so2|sulfur|sulphur|wine',
       'headache|headaches & sulfite*|sulphite*|so2|sulfur|sulphur|wine|wines',
       'asthma* & drink|drinks|bad|safe|wine',
@@ -999,12 +1000,13 @@ export const en: Words = {
     ],
     'potassium-or-sodium': [
       'sodium|smbs|na meta|na-meta & potassium|kmbs|k meta|k-meta|pot meta',
-      'sodium|smbs|na meta|na-meta & can|why|is|ok|may|allowed|what|difference & !blood|doctor|salt',
+      'sodium|smbs|na meta|na-meta & can|why|is|ok|may|allowed|what|difference & meta|metabisulfite|metabisulphite|sulfite|sulphite|bisulfite|smbs|wine|wines|na meta|na-meta|one|version|instead|powder',
     ],
     law: [
+      'how many ppm|how many mg|how many milligrams & allowed|permitted|legal|may i have',
       'legal|legally|law|laws|allowed|permitted|maximum|max|regulation|regulations & so2|sulfite*|sulphite*|sulfur|sulphur|wine & what|whats|how|is|legal|which|does|limit|maximum|max & !training|gas',
       'how much so2|how much sulfur|how much sulphur|how much sulfite & may|allowed & red|white|wine|rose|have',
-      'contains sulfites|contains sulphites|contain sulfites & label|labels|labelling|labeling|write|put|bottle',
+      'contains sulfites|contains sulphites|contain sulfites & label|labels|labelling|labeling|write|put|bottle & do|does|must|should|have to|when|why|what|is|need to|can',
     ],
     'stock-keeps': [
       'how long|keep|keeps|still good|go weak|goes weak|go off|last|lasts|store & solution|stock|sulfurous water|sulphurous water|so2 water & !make',
@@ -1017,6 +1019,7 @@ export const en: Words = {
       'malo|mlf|malolactic|ml & when|soon|wait|ok|should|how do i know|can i|how long & sulfite|sulphite|so2|sulfur|sulphur|meta|kmbs|add',
     ],
     'no-sulfite': [
+      'really needed|needed at all|needed if|necessary if & sulfite|sulphite|sulfites|sulphites|so2 & is|are',
       'why do we|why do you|why does anyone|why even|why bother & sulfite|sulphite|sulfiting|sulphiting & !add more|twice',
       'without|no|instead of|not using|skip & sulfite|sulfites|sulphite|sulphites|so2|sulfur|sulphur & can|what|is|do|possible|safe|happens|why|else & !sorbate|tablets|powder|small|sodium',
       'really need|have to use|necessary|do i need|need to add|why add|why use & sulfite|sulfites|sulphite|sulphites|so2|sulfur|sulphur & !sorbate|training|gas|ph|measure|test|before bottling',
@@ -1034,6 +1037,7 @@ export const en: Words = {
       'how much so2|how much sulfur|what share|what percent|what percentage|yield & in|of|for & meta|kmbs|metabisulfite|metabisulphite|k-meta|campden',
     ],
     'old-powder': [
+      'any good|still fine|gone bad|past it|lost its & meta|kmbs|metabisulfite|metabisulphite|powder & how|is|does|can|has|tell & !strip|strips|stock',
       'lose strength|loses strength|lost strength|lose its strength|lose power|get weaker & meta|kmbs|metabisulfite|metabisulphite|sulfite|sulphite|powder & does|do|is|has|can|how',
       'tub|bag|bucket|jar|box|packet & meta|kmbs|metabisulfite|metabisulphite|powder & open|opened|years|months & ok|okay|use|good|still|throw & !stock|ordered|bought',
       'old|last year|last years|last year\'s|years|year|go off|goes off|expire*|clumpy|clumped|open all|keep|keeps|weaker|shelf life|lumpy|hard|gone off|still good|still ok & kmbs|meta|metabisulfite|metabisulphite|sulfite|sulphite|powder|bag|pot meta|campden & can|is|does|do|how long|still|what|was & !solution|stock|every|vat',
@@ -1048,11 +1052,13 @@ export const en: Words = {
       'no balance|no scale|no scales|without a scale|without a balance|don\'t have a scale|dont have a scale & how|can|what',
     ],
     'strip-reads-otherwise': [
+      'test strip|test strips|the strips|so2 strips|titrets & worth|any use|any good|useless|work|rubbish',
       'strip|strips|titret|titrets|test kit|test kits & lab|accurate|trust|right|different|reliable|good|else',
       'ripper & ao|a-o|aeration|lab|higher|lower|accurate|right|red|reds',
       'which method|what method|best method|best way to measure|most accurate & so2|free|sulfite|sulphite|sulfur|sulphur',
     ],
     'fell-short': [
+      'only got|only reached|only came|only landed|ended up at & how come|why|what happened',
       'where & disappear|disappears|disappearing|vanish|vanishes & so2|sulfite|sulphite|sulfur|sulphur|free',
       'barely moved|hardly moved|barely rose|hardly rose|didn\'t move|didnt move|did not move|didn\'t budge & free|so2 & why|how|what',
       'why & lower|less|not|didn\'t|didnt|only|drop|drops|dropped|fall|fell|low & free|so2|you said|up|planned|target|addition',
@@ -1065,6 +1071,7 @@ export const en: Words = {
       'how often|how frequently|how regularly|every how|how many times|once a month|every week|every month|each week & measure|measured|test|tested|check|checked|so2|free & !racking|add a',
     ],
     'small-or-large': [
+      'one & or & tiny|several|small|smaller|three & addition|additions|dose|doses|ones & which|better|wastes|is it|should',
       'in one go|all at once|in one hit & spread|in steps|bit by bit|over the month|several & meta|kmbs|sulfite|sulphite|so2|it & would|should|can|is|or',
       'small|little|bit|split|several|many & big|large|one|once|doses|dose|additions|why|not & or|better|should|why|can|instead & so2|sulfite|sulphite|sulfur|dose|doses|addition|additions|all in|racking & !powder|tablets',
       'all in at once|all at once & can|is|should|bit|or & !drink',
@@ -1085,6 +1092,7 @@ export const en: Words = {
       'how many mg|how many ppm|how much is one|how do i turn|how do you turn|convert & g/hl|g / hl|g hl|gram per hectolitre|grams per hectolitre',
     ],
     'pH-matters': [
+      'why|what for & ask|asks|asking|want|wants & ph|the ph & !meter',
       'without a ph|without ph|without the ph|no ph & can|why|how & dose|work it out|tell|calculate|reckon|you & !meter',
       'ph & why|what has|have to|really need|need to|matter|matters & so2|sulfite|sulphite|sulfur|sulphur|need|measure|matter|matters',
     ],
