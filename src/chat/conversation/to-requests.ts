@@ -65,7 +65,6 @@ function volumeOf({
   return { volume_L, volume_display: { value, unit: volumeUnit } };
 }
 
-/** What is known of the wine; the law of the market is the cellar's. */
 /** The oxygen that is allowed for at bottling. */
 function oxygenIn({ marks: { oxygen_mg_L, SO2_mg_per_mg_O2 } }: Reading): OxygenAtBottling {
   return {
@@ -80,13 +79,22 @@ function fruitIn({ fields, assumed, marks }: Reading): Pick<DoseRequest, 'fruit'
   return fruit === undefined ? {} : { fruit };
 }
 
-function wineOf({ fields, totalOf }: Reading, { region }: Pick<Settings, 'region'>): WineFacts {
+/** Whether the wine is organic; in the US one "made with organic grapes" is of a class of its own. */
+export function organicOf({ fields, marks }: Reading, region: Settings['region']): WineFacts['organic'] {
+  return region === 'us' && marks.ofOrganicFruit ? 'made-with' : fields.organic;
+}
+
+/** What is known of the wine; the law of the market is the cellar's. */
+function wineOf(reading: Reading, { region }: Pick<Settings, 'region'>): WineFacts {
+  const { fields, totalOf } = reading;
+  const organic = organicOf(reading, region);
   return {
     region,
     ...(fields.total_mg_L !== undefined && {
       total_from: totalOf === undefined ? ('measured' as const) : ('running-sum' as const),
     }),
     ...pick(fields, WINE_FIELDS),
+    ...(organic !== undefined && { organic }),
   };
 }
 
@@ -100,7 +108,6 @@ const WINE_FIELDS = [
   'style',
   'category',
   'product',
-  'organic',
   'designated_mg_L',
   'uplift',
   'quality',

@@ -116,6 +116,8 @@ export type VolumeUnit = 'L' | 'hL' | 'mL' | 'm3' | 'galUS' | 'galUK' | 'barrel'
 
 /** Facts of a message that are no field but steer what it means and what is asked. */
 export interface Marks {
+  /** "Made with organic grapes": in the US a class of its own, which may hold added sulfite. */
+  ofOrganicFruit?: true;
   /** A powder or solution was named without its cation. */
   unnamedAdditive?: true;
   /** It was named as a solution, so that its strength is missing too. */

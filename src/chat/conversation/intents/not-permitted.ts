@@ -8,6 +8,7 @@ import { factLines } from '../lines/facts.ts';
 import { line } from '../lines/line.ts';
 import { vesselText } from '../lines/vessel.ts';
 import type { Outcome, Turn } from '../outcome.ts';
+import { organicOf } from '../to-requests.ts';
 
 /**
  * What may not go in: ammonium bisulfite where it is no must, sodium salts and ammonium in organic wine of the EU and the
@@ -44,7 +45,8 @@ function refusedAsOrganic(
   answer: DoseAnswer,
   { manner, settings: { region } }: Turn,
 ): Outcome | undefined {
-  const { organic, stage, product } = reading.fields;
+  const { stage, product } = reading.fields;
+  const organic = organicOf(reading, region);
   const against = notPermittedBy(additive, {
     region,
     ...(organic !== undefined && { organic }),

@@ -23,7 +23,7 @@ const isThanks = (board: Board, i: number): boolean =>
   isCue(board, i, 'thanks') &&
   (isMark(board, 1, '!') || isMark(board, 1, ',') || isMark(board, 1, '.'));
 
-/** Finds colour, category and product, and the word organic. */
+/** Finds colour, category and product, and the word organic; a phrase that is of fruit too says only that the grapes were. */
 export function findKind(board: Board): void {
   for (let i = 0; i < board.terms.length; i++) {
     if (board.taken[i] === true || termAt(board, i).kind !== 'word' || isOtherwise(board, i)) continue;
@@ -40,6 +40,9 @@ export function findKind(board: Board): void {
       if (isCue(board, i, 'quality')) find(board, 'quality', true, 'labelled', i, i);
       if (isCue(board, i, 'other-sparkling')) find(board, 'quality', false, 'labelled', i, i);
     } else if (product) find(board, 'product', product, 'labelled', i, i);
-    else if (hasTag(board, i, 'organic')) find(board, 'organic', true, 'labelled', i, i);
+    else if (hasTag(board, i, 'organic')) {
+      find(board, 'organic', true, 'labelled', i, i);
+      if (isCue(board, i, 'fruit')) board.marks.ofOrganicFruit = true;
+    }
   }
 }

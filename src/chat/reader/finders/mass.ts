@@ -19,13 +19,13 @@ function skipsTo(board: Board, i: number): number {
     at < i + 3 &&
     (isCue(board, at, 'of') ||
       isCue(board, at, 'article') ||
-      STYLES.some((style) => hasTag(board, at, style)))
+      ADJECTIVES.some((tag) => hasTag(board, at, tag)))
   )
     at++;
   return at;
 }
 
-const STYLES = ['style:red', 'style:white', 'style:rosé'] as const;
+const ADJECTIVES = ['style:red', 'style:white', 'style:rosé', 'organic'] as const;
 
 /** A `G` with "of must", "of wine", "of juice" may mean gallons; grams of wine nobody weighs. */
 export const mayBeGallons = (board: Board, i: number): boolean => {
