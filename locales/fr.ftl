@@ -4,6 +4,7 @@
 ## Pieces that other sentences use
 
 list-separator = {", "}
+barrel-name = barrique
 cautions-separator = {" "}
 dose-in-all-separator = {" et "}
 cautions-of-separator = {" "}
@@ -503,10 +504,10 @@ solution-holding = Solution de conservation, { $volume } : { $acid } d’acide 
 solution-rinse = Rinçage, { $volume } : { $acid } d’acide citrique, { $amount } de { additive }.
 solution-order = Toute l’eau, puis l’acide, le sulfite en dernier, peu à peu. Jamais de poudre sur l’acide.
 solution-air = Elle dégage du SO2 : ventiler, visage à l’écart, aussi de la bonde.
-solution-for-holding = Pour une barrique vide et propre, pleine à la bonde ; à revoir après quelques semaines.
+solution-for-holding = Barrique vide et propre, pleine à la bonde ; à revoir après quelques semaines.
 solution-for-rinse = Pour du matériel propre : tout mouiller, laisser agir quelques minutes.
 solution-drain = Vidanger selon les règles locales. Rincer à l’eau avant le vin.
-solution-practice = { $salt } et { $acid } g/L : pratique courante, sans source. Ton propre chiffre : { $use ->
+solution-practice = { $salt } et { $acid } g/L : pratique courante, sans source. Sinon : { $use ->
         [holding] solution de conservation { $litres } L 1% méta
        *[rinse] rinçage { $litres } L 1% méta
     }
@@ -590,7 +591,12 @@ fact-strength =
         [SO2-per-100mL] { additive }, { $strength } % = { $strength } g de SO2 dans 100 mL
        *[noted] { additive }, { $strength } %
     }
-assumed-additive = { additive } pur
+assumed-additive =
+    { $additive ->
+        [potassium-metabisulfite] métabisulfite de potassium pur
+        [sodium-metabisulfite] métabisulfite de sodium pur
+       *[other] { additive } pur
+    }
 assumed-target = objectif { target }
 assumed-target-red = objectif { target } (rouge)
 assumed-target-sweet = objectif { target } (doux)
@@ -1162,7 +1168,7 @@ round-red = « Si rouge » vaut pour { $red } moléculaire.
 round-stock = En solution à { $strength } % : { $list }.
 round-rest = Le reste en solution à { $strength } % : { $list }.
 round-stock-of = { $vessel } { $amount }
-mixed-sample = C’est la moyenne des { $count } : elle ne montre pas le plus bas. L’écart n’est pas connu ; un fût 5 plus bas finit 5 plus bas. En mesurer quelques-uns avant (pratique courante, sans source).
+mixed-sample = C’est la moyenne des { $count }, pas le plus bas. L’écart n’est pas connu ; un fût 5 plus bas finit 5 plus bas. En mesurer quelques-uns avant (pratique courante, sans source).
 round-mixed = ⚠ Un échantillon moyen dit la moyenne, pas le plus bas : { $list }. En mesurer quelques-uns.
 round-low = ⚠ Sous 10 de libre, beaucoup ou tout peut se combiner : { $list }. Y mesurer avant d’en remettre.
 round-name = { $name }
@@ -1252,7 +1258,7 @@ round-not-understood =
        *[other] « { $about } » : je n’ai pas pu lire.
     }
 round-effect-short = D’habitude 1/3 à 1/2 se combine : mesurer demain.
-round-effect = D’habitude 1/3 à 1/2 d’un ajout se combine : mesurer demain. Calcul d’une cuve : envoyer sa ligne seule.
+round-effect = D’habitude 1/3 à 1/2 se combine : mesurer demain. Pour le calcul : envoyer une ligne seule.
 choice-additive = { $value ->
         [potassium-metabisulfite] Métabisulfite de potassium E224
         [sodium-metabisulfite] Métabisulfite de sodium E223
