@@ -1950,7 +1950,7 @@ picture-nothing = No picture of { $vessel }: no SO2 measured yet in the wine tha
 
 # Plain questions: the answer, a figure with its source, and what to send next.
 question-small-or-large = Fewer and larger. A small addition can bind whole and leave nothing free.
-question-small-or-large-why = Of an addition 35 to 67 % stays free; published figures disagree, so measure the day after.
+question-small-or-large-why = Of an addition 35 to 67 % stays free (AWRI; a handbook, from memory); figures disagree, so measure the day after.
 question-small-or-large-next = For your wine: T4 1450 gal pH 3.58 free 21
 question-how-often = Tanks about every month, barrels every two weeks, and a day after each addition (common practice, no source).
 question-how-often-why = Sooner when it is warm, half full or low in free SO2.
@@ -2022,7 +2022,7 @@ question-too-much = Put nothing more in. Time, air and racking lower free SO2; b
 question-too-much-why = From about 2 mg/L molecular people smell it (Understanding Wine Chemistry, 2016). Peroxide: only someone qualified, where law allows it.
 question-too-much-next = Where it stands: T4?
 question-no-sulfite = You can, and the wine then stands on cold, clean, full vessels, low pH and quick sale.
-question-no-sulfite-why = Yeast make some of their own, usually under 30 mg/L: "no sulfite added" is not "no sulfite".
+question-no-sulfite-why = Yeast make some of their own, usually under 30 mg/L (an amateur article): "no sulfite added" is not "no sulfite".
 question-no-sulfite-next = What it has: T4 pH 3.5 free 5
 question-bottling = Measure some days before; the last addition goes in before the line starts, mixed and measured.
 question-bottling-why = Each mg/L of oxygen picked up can take up to 4 mg/L of free SO2 (by formula).
@@ -2121,8 +2121,8 @@ titration-result = { $vessel ->
 titration-too-much = More than wines hold: check the sample, the burette and the titrant’s strength. It is not kept.
 titration-molar = { $molar } M iodine is { $normal } N: one mole takes up twice.
 titration-ascorbic-asked = Iodine counts ascorbic acid too: { $amount } mg/L of it reads as +{ $counts } { $unit }. If there is any, add “ascorbic { $amount }”.
-titration-precision = Two results of one wine may differ by { $again } in one lab, by { $other } between two (published).
-titration-red-high = A red: acidified methods read free SO2 high, in one study by up to 66 %. Nothing is taken off; use one method throughout.
+titration-precision = Two results of one wine may differ by { $again } in one lab (OIV, from memory), by { $other } between two (EEC 2676/90).
+titration-red-high = A red: acidified methods read free SO2 high, in one study by up to 66 % (Virginia, 2022). Nothing is taken off; use one method throughout.
 titration-name-vessel = To keep it as a reading, put the vessel in front: T4 …
 titration-read = Read: { $list }.
 titration-sample = sample { $volume } mL
@@ -2244,7 +2244,7 @@ forecast-steady = { $vessel }: by its readings free SO2 does not fall; { $from -
 }
 forecast-by-readings = By { $count } readings since the last addition: { $lost } % lost in 30 days.
 forecast-by-rates = { $container ->
-    [bottle] By a study of bottles, not by this wine: after 3 years 45 % left at 14 °C, 20 % at 15–26 °C.
+    [bottle] By a study of bottles (told by a Quebec wine site), not by this wine: after 3 years 45 % left at 14 °C, 20 % at 15–26 °C.
    *[other] By what barrels lose, not by this wine: 3–10 mg/L a month (common practice, no source). { $fewest } readings tell its own; there { $number ->
         [one] is { $count }
        *[many] are { $count }
