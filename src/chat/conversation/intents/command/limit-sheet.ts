@@ -5,8 +5,9 @@ import { roomToLimit, beforeOf, type RoomToLimit } from '../../../../core/dose/r
 import { LAW_TEXTS } from '../../../../core/limits/law-texts.ts';
 import type { Limit } from '../../../../core/limits/limit.ts';
 import { limitsFor } from '../../../../core/limits/limits-for.ts';
+import { notPermittedBy } from '../../../../core/limits/permitted.ts';
 import type { Region } from '../../../../core/limits/region.ts';
-import type { Fields, Reading } from '../../../reader/understood.ts';
+import type { Reading } from '../../../reader/understood.ts';
 import { numberText } from '../../../replies/number-text.ts';
 import type { Line } from '../../../replies/reply.ts';
 import { vesselName } from '../../../replies/vessel-name.ts';
@@ -19,6 +20,7 @@ import { bareAmount } from '../../lines/measured.ts';
 import { mannerOf, type Manner } from '../../manner.ts';
 import type { Handled } from '../../ports.ts';
 import { replying } from '../../replying.ts';
+import { organicOf } from '../../to-requests.ts';
 import { totalOfVessel, type TotalKnown } from '../../total-of-vessel.ts';
 
 /** Litres that an amount is told for where the volume is not known: a hectolitre. */
@@ -36,7 +38,8 @@ export function limitSheet(reading: Reading, here: Here): Handled {
 }
 
 /** What is known of the wine: what was said goes before what is known of the vessel. */
-function factsOf(vessel: Vessel | undefined, fields: Fields, region: Region): Facts {
+function factsOf(vessel: Vessel | undefined, reading: Reading, region: Region): Facts {
+  const { fields } = reading;
   const traits: WineTraits = Object.fromEntries(
     Object.entries(vessel?.traits ?? {}).map(([trait, { value }]) => [trait, value]),
   );
@@ -47,6 +50,7 @@ function factsOf(vessel: Vessel | undefined, fields: Fields, region: Region): Fa
     ...traits,
     ...fields,
     region,
+    organic: organicOf(reading, region) ?? traits.organic ?? false,
     ...(free_mg_L !== undefined && { free_mg_L }),
     ...(total_mg_L !== undefined && { total_mg_L }),
   };
@@ -57,9 +61,11 @@ type Facts = Parameters<typeof roomToLimit>[0] & { readonly volume_L?: number };
 function sheetLines(reading: Reading, vessel: Vessel | undefined, region: Region, here: Here): Line[] {
   const { fields } = reading;
   const manner = mannerOf(reading, here.memory.decimalMark ?? '.', here);
-  const facts = factsOf(vessel, fields, region);
+  const facts = factsOf(vessel, reading, region);
   const found = limitsFor(facts);
   const name = fields.vessel === undefined ? 'none' : vesselName(fields.vessel);
+  if (notPermittedBy('potassium-metabisulfite', facts)?.reason === 'organic-none')
+    return noneAtAll(name, region);
   const { none, total, free } = found;
   const limits = [total, free].filter((one) => one !== undefined);
   const room = roomToLimit(facts);
@@ -80,6 +86,16 @@ function sheetLines(reading: Reading, vessel: Vessel | undefined, region: Region
       ? [line('first', 'designation-asked', { region, wine: name === 'none' ? 'limit white' : name })]
       : []),
     ...listLine('first', 'limit-notes', lawNotes(found, manner.mark)),
+    line('first', 'limit-care'),
+  ];
+}
+
+/** Wine that is labelled organic may have none added: the ordinary limit would say the contrary. */
+function noneAtAll(vessel: string, region: Region): Line[] {
+  const values = { vessel, region, reason: 'organic-none', additive: '' };
+  return [
+    line('first', 'refused-organic', values),
+    textLine({ rule: 'us-organic' }),
     line('first', 'limit-care'),
   ];
 }
@@ -124,7 +140,7 @@ function roomLine(limit: Limit, room: RoomToLimit, manner: Manner): Line[] {
 }
 
 /** The text that the rule stands in, and how the figure was checked. */
-function textLine({ rule }: Limit): Line {
+function textLine({ rule }: Pick<Limit, 'rule'>): Line {
   const row = rowOfRule(rule);
   return line('first', 'limit-text', {
     text: row === undefined ? rule : LAW_TEXTS[row.text].name,
