@@ -40,7 +40,9 @@ export function findNumberWord(board: Board): void {
       isCue(board, i + 1, 'of') || isCue(board, i + 1, 'article') || isCue(board, i + 1, 'number-word')
         ? i + 2
         : i + 1;
-    if (areTanks(board, to) || (isCounted(board, to) && board.taken[to] !== true))
+    // A tablet is found before its number is missed: `two tablets of 2 g` are not one.
+    const isTablet = isCue(board, to, 'tablet') || hasTag(board, to, 'additive:campden');
+    if (areTanks(board, to) || (isCounted(board, to) && (isTablet || board.taken[to] !== true)))
       refuse(board, 'ambiguous-number', i, to);
     else if (
       board.terms[i - 1]?.tags.some((tag) => /^label:(free|total|ph)$/.test(tag)) &&
