@@ -6,6 +6,7 @@ import type { LabelId } from '../words/words.ts';
 import type { Beside } from './figure-beside.ts';
 import { figureAfter, figureBefore, figureBeside, hasForeignUnit, labelAt } from './figure-beside.ts';
 import { keepFigure } from './keep-labelled.ts';
+import { isWishedLevel } from './wished-level.ts';
 
 function isRangeAt(board: Board, { at, to }: Beside): number | undefined {
   const joins =
@@ -82,6 +83,8 @@ function findLabel(board: Board, i: number, label: LabelId): void {
   }
   const [from, to] = [Math.min(i, figureAt(board, beside.at).from), Math.max(i, beside.to)];
   if (isCue(board, i - 1, 'not') && beside.at > i) return refuse(board, 'ambiguous-number', i - 1, to);
+  if ((label === 'free' || label === 'so2') && isWishedLevel(board, from))
+    return refuse(board, 'ambiguous-number', from, to);
   if (isLimit(board, i, beside)) return setAside(board, from, to);
   if (isCounted(board, label, beside)) return setAside(board, from, Math.max(to, beside.at + 1));
   if (isSmallTalk(board, label, beside)) return;
