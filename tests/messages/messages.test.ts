@@ -37,9 +37,14 @@ for (const file of [
 
 describe('the own words, statements, moments, lots and remarks of a message are read as its label says', () => {
   test.each(
-    ['en-commands.jsonl', 'en-law.jsonl', 'en-lab.jsonl', 'es/cellar.jsonl', 'fr/cellar.jsonl'].flatMap(
-      (file) => labelledIn(file),
-    ),
+    [
+      'en-commands.jsonl',
+      'en-law.jsonl',
+      'en-lab.jsonl',
+      'es/cellar.jsonl',
+      'es/floor.jsonl',
+      'fr/cellar.jsonl',
+    ].flatMap((file) => labelledIn(file)),
   )('$id reads as it was meant: $text', (labelled) => {
     const { beside } = judge(labelled);
     expect(beside.read).toEqual(beside.wanted);
