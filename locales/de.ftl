@@ -497,11 +497,11 @@ solution-too-cold = Nein: { $wanted } g/L in Wasser von { $water } °C. Veröffe
 solution-colder = Unter { $celsius } °C ist keine Zahl veröffentlicht: schau, dass sich alles gelöst hat.
 solution-holding = Konservierungslösung, { $volume }: { $acid } Zitronensäure, { $amount } { additive }.
 solution-rinse = Spüllösung, { $volume }: { $acid } Zitronensäure, { $amount } { additive }.
-solution-order = Erst das ganze Wasser, dann die Säure, zuletzt das Sulfit nach und nach. Nie Pulver auf Säure.
+solution-order = Erst alles Wasser, dann die Säure, zuletzt nach und nach das Sulfit. Nie Pulver auf Säure.
 solution-air = Dabei wird SO2 frei: lüften, Gesicht weg, auch vom Spundloch.
 solution-for-holding = Für ein leeres, sauberes Fass, spundvoll; alle paar Wochen nachsehen.
 solution-for-rinse = Für sauberes Gerät: alles benetzen, ein paar Minuten wirken lassen.
-solution-drain = Ablassen, wie es die örtlichen Regeln erlauben. Mit Wasser spülen, bevor Wein hineinkommt.
+solution-drain = Ablassen nach örtlichen Regeln; vor dem Wein mit Wasser spülen.
 solution-practice = { $salt } und { $acid } g/L: üblich, ohne Quelle. Deine eigene Zahl: { $use ->
         [holding] Konservierungslösung { $litres } L KDS 1%
        *[rinse] Spüllösung { $litres } L KDS 1%
