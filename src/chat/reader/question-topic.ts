@@ -5,20 +5,26 @@ import type { Draft, FieldName } from './understood.ts';
 /** One of several ways to put a word of a question; with a star it is the beginning of a word. */
 type Way = string;
 
-/** A question as it is put: of each group one way is in it, and none of those that exclude it. */
+/**
+ * A question as it is put: of each group one way is in it, and none of those that exclude it. One that begins with a plus
+ * is a question also where it speaks of somebody's wine: no dose may come of it.
+ */
 interface Pattern {
   readonly topic: QuestionId;
   readonly groups: readonly (readonly Way[])[];
   readonly without: readonly Way[];
+  readonly isOfAnyWine: boolean;
 }
 
 const waysOf = (group: string): readonly Way[] =>
   group.split('|').map((way) => (way.endsWith('*') ? ` ${way.slice(0, -1)}` : ` ${way} `));
 
 function patternOf(topic: QuestionId, written: string): Pattern {
-  const groups = written.split(' & ');
+  const isOfAnyWine = written.startsWith('+ ');
+  const groups = written.slice(isOfAnyWine ? 2 : 0).split(' & ');
   return {
     topic,
+    isOfAnyWine,
     groups: groups.filter((group) => !group.startsWith('!')).map(waysOf),
     without: groups.filter((group) => group.startsWith('!')).flatMap((group) => waysOf(group.slice(1))),
   };
@@ -63,10 +69,14 @@ function isOfOnesWine({ intent, fields, command }: Draft): boolean {
  * ```
  */
 export function questionTopic(texts: readonly string[], draft: Draft): QuestionId | undefined {
-  if (isOfOnesWine(draft)) return undefined;
+  const isOfOwn = isOfOnesWine(draft);
+  const isTold = ['added', 'reading', 'titration', 'emergency', 'command'].includes(draft.intent);
   const text = ` ${texts.join(' ')} `;
   const holds = (way: Way): boolean => text.includes(way);
   return PATTERNS.find(
-    ({ groups, without }) => groups.every((group) => group.some(holds)) && !without.some(holds),
+    ({ groups, without, isOfAnyWine }) =>
+      (!isOfOwn || (isOfAnyWine && !isTold)) &&
+      groups.every((group) => group.some(holds)) &&
+      !without.some(holds),
   )?.topic;
 }

@@ -1104,6 +1104,7 @@ export const en: Words = {
       'which|what & molecular|target|free so2|level of free|level of so2|free sulfur & aim|should|use|for|good|have|right|need',
     ],
     'too-much': [
+      '+ peroxide|h2o2|hydrogen peroxide & so2|sulfite|sulphite|free|total|add|lower|drop|how|ml|l|can|may|should|bring|reduce|dose & !clean|cleaned|cleaning|rinse|rinsed|rinsing|wash|washed|floor|hands',
       'stinks|reeks|smells|stings & sulfur dioxide|sulphur dioxide|so2|sulfite|sulphite|struck match & fix|what|how|help|do i',
       'overdosed|over dosed|oversulfited|over sulfited & what|how|help',
       'too much|excess|over sulfited|oversulfited|over dosed|overdosed & so2|sulfite|sulphite|sulfur|sulphur|meta|it',
