@@ -114,7 +114,7 @@ refused-ammonium-must =
        *[said] C’est du moût ? Alors tout réécrire, avec le mot moût.
     }
 dose-nothing = { at }rien à ajouter.
-dose-rate = { at }{ $dose } de SO2 à ajouter, soit { measured } pour { $per }
+dose-rate = { at }{ $dose } de SO2 à ajouter, soit { measured } par { $per }
 dose-rate-bare = { at }{ $dose } de SO2 à ajouter
 dose-need = { at }à pH { $ph }, { $molecular } moléculaire demande { $free } de libre
 dose-now = { at }{ $molecular } moléculaire maintenant (pH { $ph }, { $free } de libre)
@@ -685,9 +685,9 @@ problem-unit-mismatch = { at }l’unité ne va pas dans « { $about } ». Le S
 problem-ambiguous-number =
     { $kind ->
         [split] { at }il y a un espace dans « { $about } ». Écrire : pH { $one }
-        [volume] { at }« { $about } » pourrait se tromper de mille fois. Écrire : { $one }, ou : { $two }
-        [mass] { at }« { $about } » pourrait se tromper de mille fois. Écrire : { $one }, ou : { $two }
-        [thousands] { at }« { $about } » pourrait se tromper de mille fois. Écrire : { $one }, ou : { $two }
+        [volume] { at }« { $about } » : un doute d’un facteur mille. Écrire : { $one }, ou : { $two }
+        [mass] { at }« { $about } » : un doute d’un facteur mille. Écrire : { $one }, ou : { $two }
+        [thousands] { at }« { $about } » : un doute d’un facteur mille. Écrire : { $one }, ou : { $two }
         [powder] { at }« { $about } » : de SO2, ou de poudre ? Écrire : ajouter { $one } ppm SO2, ou : { $two } g par 10 L { $named }
         [salt] { at }« { $about } » : de SO2, ou de sel ? En SO2, c’est trop fort pour être vendu. Si l’étiquette dit sel, écrire : { salt-name } sel { $one }%
         [water] { at }« { $about } » : solution sulfureuse, ou solution de métabisulfite ? Écrire : solution sulfureuse { $one }%, ou : solution de méta { $one }%
@@ -752,12 +752,12 @@ warning-sodium =
         [eu] ⚠ Le métabisulfite de sodium n’est pas pour le vin dans l’UE, pour le matériel seulement (non confirmé). Demander d’abord.
         [uk] ⚠ Le métabisulfite de sodium n’est pas pour le vin au Royaume-Uni, pour le matériel seulement (non confirmé). Demander d’abord.
         [ar] ⚠ Le métabisulfite de sodium n’est pas pour le vin en Argentine : sels de potassium seulement (INV 281/85). Demander d’abord.
-       *[other] ⚠ Métabisulfite de sodium : aucune liste lue pour { law-of }, donc non confirmé ; beaucoup de règles l’interdisent dans le vin. Demander d’abord.
+       *[other] ⚠ Métabisulfite de sodium : aucune liste lue ({ law-of }), donc non confirmé ; beaucoup de règles l’interdisent dans le vin. Demander d’abord.
     }
 refused-organic =
     { $reason ->
         [organic-none] { at }pas de sulfite : un vin étiqueté bio n’en admet aucun ({ law-of }, 7 CFR part 205).
-       *[organic] { at }pas avec { additive } : un vin bio n’admet que le SO2 et les sels de potassium ({ law-of }, règlement 889/2008).
+       *[organic] { at }pas de { additive } : un vin bio n’admet que le SO2 et les sels de potassium ({ law-of }, règlement 889/2008).
     }
 refused-organic-instead =
     { $reason ->
@@ -1432,16 +1432,16 @@ on-it =
 claimed = { $vessel } est pour toi jusqu’à { $until }. Les autres le voient.
 claim-taken = { $vessel } : { $who } s’en charge depuis { $when }.
 ordered = Consigne { $entry } : { $vessel } { $list }.
-ordered-open = En cours jusqu’à ce que quelqu’un note ce qui est mis.
+ordered-open = En cours jusqu’à ce que quelqu’un note ce qui a été mis.
 order-how = Par ex. : consigne T4 256 g
 order-gone = La consigne { $entry } n’est plus en cours.
 remind-set = Je redemande pour { $vessel } : { $when }.
 remind-late = Trop tard pour ça : mesurer { $vessel } maintenant.
 undo-nothing = Rien de toi à annuler.
 undo-late = L’entrée { $entry } a plus de 15 minutes. Écrire : rayer { $entry } et pourquoi
-undo-not-yours = L’entrée { $entry } est de { $who }. Écrire : rayer { $entry } et pourquoi
+undo-not-yours = L’entrée { $entry } a été notée par { $who }. Écrire : rayer { $entry } et pourquoi
 strike-none = Il n’y a pas d’entrée { $entry }.
-strike-again = L’entrée { $entry } a déjà été rayée, par { $by }.
+strike-again = L’entrée { $entry } a déjà été rayée (par { $by }).
 strike-correction = L’entrée { $entry } est elle-même une correction. Noter à nouveau ce qui était juste.
 strike-why = Pourquoi ? Écrire : rayer { $entry } erreur de saisie
 struck = Rayé { $entry } ({ $list }). Les deux restent sur la feuille.
@@ -1804,8 +1804,8 @@ edited-late = Ta modification ne change rien : ce message a plus de 15 minutes.
 edited-anew = Je ne prends pas ça d’une modification. L’envoyer dans un nouveau message.
 added-it-none =
     { $vessel ->
-        [none] Qu’est-ce qui est mis, et où ? Par ex. : ajouté 82 g de méta T4
-       *[other] Qu’est-ce qui est mis dans { $vessel } ? Par ex. : ajouté 82 g de méta { $vessel }
+        [none] Qu’est-ce qui a été mis, et où ? Par ex. : ajouté 82 g de méta T4
+       *[other] Qu’est-ce qui a été mis dans { $vessel } ? Par ex. : ajouté 82 g de méta { $vessel }
     }
 picture-none =
     { $vessel ->
@@ -2125,7 +2125,7 @@ stock-not-kept = Rien n’en est encore noté en stock, donc rien n’en sort. L
 stock-lacks =
     { $what ->
         [additive] Quel produit ? Écrire : reçu 25 kg de méta
-        [strength] Quel titre pour { additive } ? Écrire : reçu 10 L de SO2 6%
+        [strength] Quel titre ({ additive }) ? Écrire : reçu 10 L de SO2 6%
         [size] Des comprimés de combien de grammes ? Écrire : reçu 50 comprimés 5 g
         [volume] { additive } : les ajouts se mesurent en volume. Écrire : reçu 10 L de SO2 6%
         [one] Un seul produit par message. Écrire : reçu 25 kg de méta
@@ -2207,7 +2207,7 @@ range-dose = { $vessel ->
 }.
 range-sure = Après la dose, { $molecular } { $unit } moléculaire sont sûrs, si ce qui se combine est comme compté.
 range-sure-unbound = Si rien ne se combine, { $molecular } { $unit } moléculaire sont sûrs après la dose.
-range-sure-low = Sous 10 { $unit } de libre, toute la dose peut se combiner : sûr n’est que { $molecular } { $unit } moléculaire. Mesurer après un jour.
+range-sure-low = Sous 10 { $unit } de libre, toute la dose peut se combiner : seul { $molecular } { $unit } moléculaire est sûr. Mesurer après un jour.
 range-rests = Repose sur pH ± { $ph } et libre ± { $free } { $unit }{ $said ->
     [both] .
     [one] {" "}(ce que tu n’as pas dit : pratique courante, sans source).
@@ -2276,7 +2276,7 @@ forecast-steady = { $vessel } : d’après ses mesures, le libre ne baisse pas�
     [far] sous { $needed } { $unit } dans deux ans au plus tôt.
    *[other] sous { $needed } { $unit } au plus tôt vers { $from }
 }
-forecast-by-readings = D’après { $count } mesures depuis le dernier ajout : { $lost } % de perdu en 30 jours.
+forecast-by-readings = D’après { $count } mesures depuis le dernier ajout : { $lost } % perdus en 30 jours.
 forecast-by-rates = { $container ->
     [bottle] D’après une étude de bouteilles, pas d’après ce vin : après 3 ans il reste 45 % à 14 °C, 20 % à 15–26 °C.
    *[other] D’après ce que perdent les barriques, pas d’après ce vin : 3–10 mg/L par mois (pratique courante, sans source). { $fewest } mesures disent la sienne ; il y en a { $number ->
@@ -2298,7 +2298,7 @@ forecast-none = { $vessel } : { $why ->
        *[many] { $count }
     }.
 }
-forecast-unlanded = { $vessel } : le dernier ajout n’est pas encore arrivé. Mesurer d’abord le SO2 libre.
+forecast-unlanded = { $vessel } : le dernier ajout n’est pas encore mesuré. Mesurer d’abord le SO2 libre.
 blend-share = { $vessel } avec { $other } : { $starts ->
     [as-it-is] sans rien changer, { $vessel } tient les bornes ; jusqu’à { $most } % de { $other } peuvent y entrer.
    *[other] de { $least } à { $most } % de { $other } dans l’assemblage.
