@@ -10,6 +10,7 @@ import { limitWarnings } from './limit-warnings.ts';
 import { portionOf } from './portion.ts';
 import type { AddedRequest } from './request.ts';
 import { decidingLimit, roomToLimit } from './room-to-limit.ts';
+import { factWarnings } from './shared-warnings.ts';
 import { inOrder } from './warnings.ts';
 
 /**
@@ -52,19 +53,23 @@ export function added(request: AddedRequest): AddedAnswer {
   };
 }
 
-/** How the total stands once the addition is in, where the total before it is known. */
+/** Whether the additive may go in at all, and how the total stands once it is in, where the total before it is known. */
 function afterAddition(
   request: AddedRequest,
   added_mg_L: number | undefined,
 ): Pick<AddedAnswer, 'total_after_mg_L' | 'limit' | 'warnings'> {
   const { total_mg_L, total_from } = request;
-  if (total_mg_L === undefined || added_mg_L === undefined) return { warnings: [] };
+  const against = factWarnings(request).filter(({ code }) => code === 'additive-not-permitted');
+  if (total_mg_L === undefined || added_mg_L === undefined) return { warnings: against };
   const room = roomToLimit(request);
   const limit = decidingLimit(room, added_mg_L);
   return {
     total_after_mg_L: total_mg_L + added_mg_L,
     ...(limit === undefined ? {} : { limit }),
-    warnings: inOrder(limitWarnings(room, added_mg_L, total_from === undefined ? {} : { total_from })),
+    warnings: inOrder([
+      ...against,
+      ...limitWarnings(room, added_mg_L, total_from === undefined ? {} : { total_from }),
+    ]),
   };
 }
 

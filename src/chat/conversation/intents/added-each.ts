@@ -11,6 +11,7 @@ import { buttonKey } from '../keys.ts';
 import { entryRange } from '../lines/entry-range.ts';
 import { line } from '../lines/line.ts';
 import { besideAmount, notedAmount } from '../lines/noted-amount.ts';
+import { underLines } from '../lines/warnings.ts';
 import type { Outcome, Turn } from '../outcome.ts';
 import { tellingOf } from '../telling.ts';
 import { whenOf } from '../when.ts';
@@ -57,7 +58,9 @@ export function addedEach(
   for (const vessel of vessels) {
     const share = shareOf(reading, vessel, turn);
     const now = { ...here, shelves, nextEntry: here.nextEntry + notes.length };
-    const happening = additionOf(share, added(addedRequestOf(share, here)), now);
+    const own = added(addedRequestOf(share, here));
+    const happening = additionOf(share, own, now);
+    const beside = own.warnings.filter(({ values }) => values['rule'] !== happening.over_rule);
     const key = buttonKey('dose', here.message.chat, ref, vessel);
     const outcome = notedAddition({ happening, at, key }, { here: now, manner });
     const [note] = (outcome.notes ?? []) as readonly AdditionNote[];
@@ -66,7 +69,8 @@ export function addedEach(
     shelves = shelvesAfter(shelves, drawnBy(note, now));
     notes.push(note);
     // What is odd about all of them alike is told once.
-    odd.push(...outcome.inRound.slice(1).filter((one) => !odd.some((told) => isSame(told, one))));
+    const strange = [...underLines(beside, manner), ...outcome.inRound.slice(1)];
+    odd.push(...strange.filter((one) => !odd.some((told) => isSame(told, one))));
     left = outcome.lines.filter(({ key: said }) => said === 'stock-left');
   }
   const [first] = notes;
