@@ -35,8 +35,11 @@ function format(bundles: readonly FluentBundle[], { key, values, list }: Sentenc
   const faults: Error[] = [];
   const text = bundle.formatPattern(pattern, args, faults);
   if (faults.length > 0) throw new TypeError(`Cannot say "${key}": ${faults[0]?.message}`);
-  return text;
+  return text.replaceAll(ENDS_TWICE, '$1.');
 }
+
+/** A month that is shortened with a point, at the end of a sentence: `8 de out..` ends once. */
+const ENDS_TWICE = /(\p{L})\.\.(?!\.)/gu;
 
 /** Values that are names of vessels: what is kept as `barrel 17` is called in each language as it is there. */
 const NAMES: ReadonlySet<string> = new Set(['vessel', 'vessels', 'other', 'to']);
