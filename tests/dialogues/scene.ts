@@ -2,7 +2,8 @@ import type { CellarStore } from '../../src/core/cellar/cellar-store.ts';
 import { handle } from '../../src/chat/conversation/conversation.ts';
 import type { Content, IncomingMessage } from '../../src/chat/conversation/ports.ts';
 import { DEFAULT_SETTINGS, type Settings } from '../../src/chat/conversation/settings.ts';
-import { makeSay, type Said } from '../../src/chat/replies/say.ts';
+import type { Reply } from '../../src/chat/replies/reply.ts';
+import { makeSay, type Said, type Say } from '../../src/chat/replies/say.ts';
 import { loadLocales } from '../../src/edge/locales.ts';
 import { isLanguage } from '../../src/edge/is-language.ts';
 import type { AllowRule } from '../../src/edge/cellars/allow-rule.ts';
@@ -86,7 +87,7 @@ export function readScene(text: string): Scene {
 /** The clock of a scene starts in the morning of a day in harvest. */
 const START = Date.parse('2026-10-05T08:00:00Z');
 
-const say = makeSay(loadLocales());
+const inWords = makeSay(loadLocales());
 
 const MINUTES_A = { '': 1, min: 1, h: 60, d: 24 * 60 } as const;
 
@@ -102,10 +103,12 @@ export interface Playing {
   readonly settings?: Settings;
   /** Says what is due at a moment, for the `tick:` of a scene. */
   readonly tick?: (store: CellarStore, now: number) => Promise<readonly SaidUnasked[]>;
+  /** Is told every reply as data. */
+  readonly hears?: (reply: Reply) => void;
 }
 
 /** Says all that is due, as the program does in the background. */
-function makeTick(settings: Settings): NonNullable<Playing['tick']> {
+function makeTick(settings: Settings, say: Say): NonNullable<Playing['tick']> {
   return async (store, now) => {
     const serveDue = makeServeDue({ say, store, settings });
     const sent: SaidUnasked[] = [];
@@ -123,15 +126,20 @@ function makeTick(settings: Settings): NonNullable<Playing['tick']> {
 /** Plays a scene with a store in memory; gives what we answered to each move. */
 export async function play(
   { moves }: Scene,
-  { settings = DEFAULT_SETTINGS, tick = makeTick(settings) }: Playing = {},
+  { settings = DEFAULT_SETTINGS, tick, hears }: Playing = {},
 ): Promise<string[][]> {
+  const say: Say = (reply) => {
+    hears?.(reply);
+    return inWords(reply);
+  };
+  const sayDue = tick ?? makeTick(settings, say);
   let at = START;
   const store = createMemoryCellars({ now: () => at });
   const registry = createRegistry(store);
   const paceOf = createRateLimit();
   let rule: AllowRule = { is: 'open' };
   let door: Door | undefined;
-  let serve = serving(store, settings);
+  let serve = serving(store, { settings, say });
   let language: IncomingMessage['language'] = 'en';
   let person = 'Ana';
   let chat = 'one';
@@ -165,9 +173,9 @@ export async function play(
     if (does === 'allows') rule = what === 'open' ? { is: 'open' } : { is: 'invited', ids: what.split(', ') };
     if (['alone', 'group', 'allows'].includes(does))
       door = makeDoor({ store, registry, rule, paceOf, handle });
-    serve = serving(store, settings, door);
+    serve = serving(store, { settings, say, ...(door && { door }) });
     if (does === 'tick') {
-      const sent = await tick(store, at);
+      const sent = await sayDue(store, at);
       for (const one of sent) show(one.chat, [one.said]);
       answers.push(unaskedLines(sent, chat));
       continue;
@@ -199,8 +207,15 @@ export async function play(
   return answers;
 }
 
+/** What the program begins with. */
+interface Beginning {
+  readonly settings: Settings;
+  readonly say: Say;
+  readonly door?: Door;
+}
+
 /** Begins the program: nothing but the store is left from before. A fault of ours ends the scene. */
-function serving(store: CellarStore, settings: Settings, door?: Door): Serve {
+function serving(store: CellarStore, { settings, say, door }: Beginning): Serve {
   const report = (fault: unknown): never => {
     throw fault;
   };
