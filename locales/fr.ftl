@@ -1706,7 +1706,7 @@ setting-wrong =
         [quiet] Par ex. : silence 20 à 6
         [daily] Par ex. : liste quotidienne à 7:30
         [zone] Par ex. : fuseau Europe/Paris
-        [law] Pas de limite connue là. Connues : OIV, UE, UK, US, CA, AU, NZ, ZA, AR, CL, BR, JP, KR, CN, Codex, CH, GE, HK, EAEU. Par ex. : loi UE
+        [law] Pas de limite connue là. Connues : OIV, UE, UK, US, Canada, Australie, NZ, ZA, Argentine, Chili, Brésil, Japon, Corée, Chine, Codex, Suisse, Géorgie, HK, EAEU. Par ex. : loi UE
         [allowance] Par ex. : marge 30%
         [basis] Par ex. : base OIV
         [ph-days] Par ex. : le pH compte 14 jours
