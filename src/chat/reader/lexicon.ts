@@ -186,14 +186,21 @@ const ofText = new WeakMap<FoldedText, { readonly chat: Language; readonly lexic
 
 /** The lexicon of some languages; each is built when the first message in them comes. */
 function lexiconIn(languages: readonly Language[], isTold: boolean): Lexicon {
-  const key = `${languages.join()} ${isTold}`;
+  const named = languages.join();
+  const key = `${named} ${isTold}`;
   const before = built.get(key);
   if (before) return before;
-  const lists = languages.flatMap((one) => ALL_WORDS.filter(({ language }) => language === one));
-  const names = ALL_WORDS.filter(({ language }) => !languages.includes(language));
-  const lexicon = buildLexicon(lists, { names, isTold });
+  // Built once, whether the message told its languages or the chat did.
+  const other = built.get(`${named} ${!isTold}`);
+  const lexicon = other === undefined ? buildOf(languages, isTold) : { ...other, isTold };
   built.set(key, lexicon);
   return lexicon;
+}
+
+function buildOf(languages: readonly Language[], isTold: boolean): Lexicon {
+  const lists = languages.flatMap((one) => ALL_WORDS.filter(({ language }) => language === one));
+  const names = ALL_WORDS.filter(({ language }) => !languages.includes(language));
+  return buildLexicon(lists, { names, isTold });
 }
 
 /** The lexicon of a message, by the languages that its words tell. */

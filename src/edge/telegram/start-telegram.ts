@@ -8,6 +8,7 @@ import { loadLocales } from '../locales.ts';
 import { createLog } from '../logging.ts';
 import { createWakeUp } from '../reminders/wake-up.ts';
 import { wakingTurn } from '../reminders/waking-turn.ts';
+import { warmUpSoon } from '../warm-up-soon.ts';
 import { allowRuleOf } from './allow-rule-of.ts';
 import { joinConversation } from './join-conversation.ts';
 import { serveTelegram } from './serve-telegram.ts';
@@ -25,6 +26,7 @@ export async function startTelegram(ground: Ground, botToken: string): Promise<v
   const rule = allowRuleOf(config.allow);
   const parts = { handle, say, store, settings, rule, clock, log };
   const { serveDue, ...conversation } = joinConversation(parts);
+  warmUpSoon(settings);
   await serveTelegram({
     ...conversation,
     say,

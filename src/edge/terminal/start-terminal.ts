@@ -14,6 +14,7 @@ import { shownName } from '../shown-name.ts';
 import { AT_TERMINAL, runTerminal, showUnasked } from './chat.ts';
 import { backupPathOf, readNamedFile, writeExport } from './errand-files.ts';
 import { terminalSettings } from './terminal-settings.ts';
+import { warmUpSoon } from '../warm-up-soon.ts';
 
 /** What a chat on the keyboard stands on. */
 export interface TerminalGround extends Pick<Ground, 'environment' | 'operator' | 'store' | 'signal'> {
@@ -65,6 +66,7 @@ export async function startTerminal(ground: TerminalGround): Promise<void> {
       showUnasked(said, output, interactive);
     },
   });
+  if (interactive) warmUpSoon(settings);
   await runTerminal({
     serve,
     runErrand: async (errand, message) => (await runErrand(errand, message)).said,
