@@ -22,12 +22,14 @@ export interface SpokenLine {
  * ```
  */
 export function rowsOf(text: string, columns: number): number {
+  // Most texts have no letter that counts as two.
+  const hasPairs = /[\uD800-\uDFFF]/.test(text);
   let rows = 0;
   for (const paragraph of text.split('\n')) {
     rows += 1;
     let used = 0;
     for (const word of paragraph.split(' ')) {
-      const length = Array.from(word).length;
+      const length = hasPairs ? Array.from(word).length : word.length;
       if (used > 0 && used + 1 + length > columns) {
         rows += 1;
         used = length;

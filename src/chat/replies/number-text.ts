@@ -19,8 +19,10 @@ const THIN_SPACE = '\u202f';
 export function numberText(value: number, decimals: number, mark: DecimalMark, least = 0): string {
   if (!Number.isFinite(value)) throw new RangeError(`Cannot write a number as it is not finite: ${value}`);
   const [whole = '', broken = ''] = Math.abs(value).toFixed(decimals).split('.');
-  const kept = broken.slice(0, least) + broken.slice(least).replace(/0+$/, '');
-  const grouped = whole.replace(/(?<=\d)(?=(?:\d{3})+$)/g, THIN_SPACE);
+  let places = broken.length;
+  while (places > least && broken[places - 1] === '0') places -= 1;
+  const kept = broken.slice(0, places);
+  const grouped = whole.length > 3 ? whole.replace(/(?<=\d)(?=(?:\d{3})+$)/g, THIN_SPACE) : whole;
   const sign = value < 0 && (kept !== '' || /[1-9]/.test(whole)) ? '-' : '';
   return `${sign}${grouped}${kept === '' ? '' : mark + kept}`;
 }
