@@ -2257,7 +2257,7 @@ forecast-measure = { $from ->
 }
 forecast-need = It needs { $needed }: pH { $ph } of { $day }, { $molecular } molecular.
 forecast-none = { $vessel }: { $why ->
-    [unmeasured] no free SO2 measured since its last addition, racking or move. Measure it, then ask again.
+    [unmeasured] no free SO2 measured since its last addition, racking, move or bottling. Measure it, then ask again.
     [below-already] free SO2 is at or below the { $needed } { $unit } that its pH asks for. Send the reading for a dose.
    *[no-rate] no forecast yet. No rate of loss in tanks is on file, and its own takes { $fewest } readings since the last addition; there { $number ->
         [one] is { $count }

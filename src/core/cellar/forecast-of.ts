@@ -5,8 +5,9 @@ import { isBarrel } from './is-barrel.ts';
 import type { Happened, Vessel } from './vessel.ts';
 
 /**
- * The readings of free SO2 (mg/L) that show how this wine loses it: since its last addition, since it was racked or
- * moved, and since the wine is the one it is. Topping is part of how a barrel lies.
+ * The readings of free SO2 (mg/L) that show how this wine loses it: since its last addition, since it was racked,
+ * moved or bottled, and since the wine is the one it is. Topping is part of how a barrel lies. Where free SO2 rose by more
+ * than readings err, something went in that nobody noted: it begins anew there.
  *
  * Range: as many readings as a vessel keeps in sight.
  *
@@ -22,12 +23,27 @@ import type { Happened, Vessel } from './vessel.ts';
  */
 export function freePoints({ readings, additions, ...vessel }: Vessel): readonly FreePoint[] {
   const events = [vessel.changed, vessel.handled, ...additions].filter((one) => one !== undefined);
-  return readings.flatMap(({ at, entry, free_mg_L }) =>
+  const points = readings.flatMap(({ at, entry, free_mg_L }) =>
     free_mg_L === undefined || events.some((event) => isBefore({ at, entry }, event))
       ? []
       : [{ at, free_mg_L }],
   );
+  return points.slice(
+    Math.max(
+      0,
+      points.findLastIndex((point, i) => rose(points[i - 1], point)),
+    ),
+  );
 }
+
+/** Two readings differ by this in one of a thousand by their error alone (± 10 % is two standard deviations). */
+const RISE_LARGEST = 1.25;
+
+const rose = (before: FreePoint | undefined, { free_mg_L }: FreePoint): boolean =>
+  before !== undefined && free_mg_L > RISE_LARGEST * Math.max(before.free_mg_L, LEAST_mg_L);
+
+/** Below this a rise is an error of the reading, mg/L (own threshold). */
+const LEAST_mg_L = 4;
 
 /** In time, and within a minute in the order in which it was told. */
 const isBefore = (one: Happened, other: Happened): boolean =>

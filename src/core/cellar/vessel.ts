@@ -102,7 +102,7 @@ export interface Vessel {
   readonly bound_before?: Learned;
   /** When the wine became another for the last time: it was blended, or fermented, or went through malolactic. */
   readonly changed?: Happened;
-  /** When it was racked, moved or partly taken for the last time: air came to it, and it may lie otherwise than before. */
+  /** When it was racked, moved, partly taken or bottled for the last time: air came to it, and it may lie otherwise than before. */
   readonly handled?: Happened;
   readonly orders: readonly OpenOrder[];
   readonly later?: number;

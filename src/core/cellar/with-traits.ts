@@ -23,7 +23,8 @@ export function withTraits(vessel: Vessel, told: WineTraits, { at, entry }: Entr
   });
   if (fresh.length === 0) return vessel;
   const traits: KnownTraits = { ...vessel.traits, ...Object.fromEntries(fresh) };
-  const changed = { ...vessel, traits };
+  const isBottled = told.stage === 'bottled' && vessel.traits.stage?.value !== 'bottled';
+  const changed = { ...vessel, traits, ...(isBottled && { handled: { at, entry } }) };
   const before = vessel.traits.stage?.value;
   if (isFermented(before, told.stage))
     return withoutPH({ ...asNewWine(changed, { at, entry }), unlanded: [] }, 'fermentation', at);

@@ -149,3 +149,17 @@ test('of a reading and an addition of the same minute, the one that was told fir
   const blended: Happening = { kind: 'vessel', event: 'blended', vessels: ['T7'], to: 'T4' };
   expect(freePoints(atOnce(read('T4', 22), read('T7', 30), blended)).length).toBe(0);
 });
+
+test('a forecast begins anew where free SO2 rose and nothing was noted, and at bottling', () => {
+  const free = (...figures: readonly number[]): readonly number[] =>
+    freePoints(after(...figures.map((one) => read('T4', one))).get('T4') as Vessel).map(
+      (one) => one.free_mg_L,
+    );
+  expect(free(26, 40, 36, 30)).toEqual([40, 36, 30]);
+  expect(free(30, 33, 31, 29)).toEqual([30, 33, 31, 29]);
+  expect(free(2, 4, 3)).toEqual([2, 4, 3]);
+  const bottled: Happening = { kind: 'vessel', event: 'told', vessels: ['T4'], stage: 'bottled' };
+  const vessel = after(read('T4', 30), read('T4', 29), bottled, read('T4', 28)).get('T4') as Vessel;
+  expect(freePoints(vessel).length).toBe(1);
+  expect(forecastOf(vessel, 20).by).toBe('published');
+});
