@@ -49,3 +49,19 @@ test.each(PAIRS)('README: $line', async ({ options, line, shown }) => {
   const out = await ask(args, `${line}\n`);
   expect(JSON.parse(out.trim().split('\n').at(-1) ?? '')).toMatchObject(expected(shown) as object);
 });
+
+/** The table of languages, in the order of its rows: what is written, and the first line of what comes. */
+const ROWS = [...readFileSync('README.md', 'utf8').matchAll(/^\| `(T4 12 hl [^`]+)` +\| `([^`]+)` +\|$/gm)];
+
+test.each(['en', 'es', 'fr', 'it', 'de', 'pt'].map((language, at) => ({ language, row: ROWS[at] })))(
+  'README: the job in $language',
+  async ({ language, row }) => {
+    const [, written = '', answered] = row ?? [];
+    const out = await ask(
+      ['--jsonl', '--language', language],
+      `${JSON.stringify({ id: 'a', text: written })}\n`,
+    );
+    const { reply } = JSON.parse(out) as { reply: string };
+    expect(reply.replaceAll(/[\u00a0\u202f]/g, ' ').split('\n')[0]).toBe(answered);
+  },
+);

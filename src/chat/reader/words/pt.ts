@@ -442,7 +442,7 @@ export const pt: Words = {
     yes: ['sim', 'sim na mesma', 'na mesma', 'sim por favor', 'sim a dose completa'],
     yield: ['rendimento', 'rendimento de', 'o rendimento é', 'rendimento em mosto', 'rendimento habitual'],
   },
-  languages: { en: ['ingles'], es: ['espanhol'], fr: ['frances'], it: ['italiano'], de: ['alemao'], pt: ['portugues', 'pt'] },
+  languages: { en: ['ingles'], es: ['espanhol'], fr: ['frances'], it: ['italiano'], de: ['alemao'], pt: ['portugues', 'portuguesa', 'pt'] },
   months: [['janeiro', 'jan'], ['fevereiro', 'fev'], ['marco'], ['abril', 'abr'], ['maio'], ['junho', 'jun'], ['julho', 'jul'], ['agosto'], ['setembro'], ['outubro'], ['novembro', 'nov'], ['dezembro', 'dez']],
   weekdays: [['segunda'], ['terca'], ['quarta'], ['quinta'], ['sexta'], ['sabado'], ['domingo']],
   danger: {
