@@ -94,6 +94,10 @@ function isClaimedBefore(terms: readonly Term[], i: number): boolean {
       (has(terms[k], /^cue:is$/) && !has(terms[k], CLAIMS_NEXT)))
   )
     k--;
+  let sign = k;
+  while (/^[.°]$/.test(termIn(terms, sign).text)) sign--;
+  // `barrel no. 7 300 L`: the sign of a number parts no vessel from its own.
+  if (has(terms[sign], /^cue:number-sign$/) && has(terms[sign - 1], /^vessel:/)) k = sign - 1;
   return k >= 0 && has(terms[k], CLAIMS_NEXT) && !hasOwnFigure(terms, k);
 }
 

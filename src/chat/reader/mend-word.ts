@@ -21,6 +21,9 @@ const isSwapped = (a: string, b: string): boolean =>
   a.split('').toSorted().join('') === b.split('').toSorted().join('') &&
   isOneSlip(a, b);
 
+/** A sulfate and a sulfide are one letter from a sulfite and none of it, in any language. */
+const OTHER_SALT = /sul(?:f|ph)(?:at|id)/;
+
 /**
  * Mends a misspelt word, but only where it can be one word alone, and never across a chemical border.
  *
@@ -43,6 +46,7 @@ export function mendWord(word: string, lexicon: Lexicon): string | undefined {
       word.length === 4 ? candidate.length !== 4 || !isSwapped(word, candidate) : !isOneSlip(word, candidate)
     )
       continue;
+    if (OTHER_SALT.test(word) !== OTHER_SALT.test(candidate)) continue;
     if (
       found !== undefined &&
       lexicon.phrases.get(found)?.tags[0] !== lexicon.phrases.get(candidate)?.tags[0]

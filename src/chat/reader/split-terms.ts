@@ -145,6 +145,10 @@ function piecesOf(folded: FoldedText, lexicon: Lexicon): Term[] {
   return pieces;
 }
 
+/** `tot. SO2`, `Ges.-SO2`: a point that cuts a word short parts no phrase. */
+const isCutShort = ({ text }: Term, point: Term | undefined): boolean =>
+  (text.length === 2 || text.length === 3) && point?.text === '.' && !point.gap;
+
 /** The longest known phrase that begins at piece `i`; words of a phrase have a blank or a hyphen between. */
 function phraseAt(
   pieces: readonly Term[],
@@ -163,9 +167,9 @@ function phraseAt(
     const entry = lexicon.phrases.get(text);
     if (entry) found = { entry, next: k };
     const hyphen = pieces[k];
-    const joins =
-      hyphen?.kind === 'mark' && (hyphen.text === '-' || (hyphen.text === '.' && piece.text.length === 1));
-    if (joins && !hyphen.gap && pieces[k + 1]?.gap === false) k++;
+    const isGlued = hyphen?.kind === 'mark' && !hyphen.gap && pieces[k + 1]?.gap === false;
+    if (isGlued && (hyphen.text === '-' || (hyphen.text === '.' && piece.text.length === 1))) k++;
+    else if (isCutShort(piece, hyphen)) k += pieces[k + 1]?.text === '-' ? 2 : 1;
   }
   return found;
 }

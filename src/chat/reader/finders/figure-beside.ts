@@ -32,6 +32,9 @@ export interface Beside {
 /** Marks that people put between a label and its figure. */
 const GLYPHS = new Set(['~', '≈', '_', '•', '·', '|', '…', '*']);
 
+/** `ges.`, `SO2 tot.`: a word that a point may cut short. */
+const isShort = (text: string): boolean => (text.split(' ').at(-1) ?? '').length <= 4;
+
 const isJoin = (board: Board, i: number): boolean => {
   const term = board.terms[i];
   if (term === undefined) return false;
@@ -40,7 +43,8 @@ const isJoin = (board: Board, i: number): boolean => {
       term.text === ':' ||
       term.text === '=' ||
       GLYPHS.has(term.text) ||
-      (term.text === '.' && !term.gap && termAt(board, i - 1).text.length <= 4) ||
+      (term.text === '.' && !term.gap && isShort(termAt(board, i - 1).text)) ||
+      (term.text === ')' && (isMark(board, i - 2, '(') || isMark(board, i - 3, '('))) ||
       (term.text === '/' && !term.gap && !termAt(board, i + 1).gap) ||
       (term.text === '→' && hasTag(board, i - 1, 'label:ph')) ||
       (term.text === '-' && !(term.gap && board.terms[i + 1]?.gap === false))

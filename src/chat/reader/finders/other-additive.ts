@@ -1,7 +1,7 @@
 import type { Board } from '../board.ts';
 import { findingOf, hasTag, holdsCue, isCue, isFound, placeOf, refuse, termAt, setAside } from '../board.ts';
 
-const CHEMICAL_SLIP = /^(meta)?(bi)?sul(f|ph)(at|id)es?$/;
+const CHEMICAL_SLIP = /^(meta)?(bi)?sul(f|ph)(at|id)es?$|(meta|di|pyro)sul(f|ph)(at|id)$/;
 
 /** What may stand between an amount and its additive. */
 const isBetween = (board: Board, i: number): boolean =>
