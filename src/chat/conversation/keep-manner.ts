@@ -16,11 +16,12 @@ export function keepManner(understood: Understood, text: string, memory: Memory)
   const decimalMark = showsDecimals(text)
     ? understood.decimalMark
     : (memory.decimalMark ?? understood.decimalMark);
+  const inText = unitIn(text);
   return {
     ...understood,
     decimalMark,
     readings: understood.readings.map((reading) => {
-      const unit = reading.concentrationUnit ?? unitIn(text) ?? memory.concentrationUnit;
+      const unit = reading.concentrationUnit ?? inText ?? memory.concentrationUnit;
       return unit === undefined ? reading : { ...reading, concentrationUnit: unit };
     }),
   };

@@ -68,7 +68,7 @@ function joined(bundles: readonly FluentBundle[], key: string, list: readonly Se
 }
 
 /**
- * Makes `say` from the text of the locale files, once. Throws a TypeError for a sentence that is missing, or that
+ * Makes `say` from the text of the locale files, once; what is wrong in one but English shows at its first reply. Throws a TypeError for a sentence that is missing, or that
  * takes a variable nobody handed in: half a sentence about a dose is worse than none.
  *
  * @example
@@ -77,11 +77,17 @@ function joined(bundles: readonly FluentBundle[], key: string, list: readonly Se
  * ```
  */
 export function makeSay(sources: LocaleSources): Say {
-  const bundles = new Map<Language, FluentBundle>();
-  for (const [language, source] of Object.entries(sources))
-    bundles.set(language as Language, bundleOf(language as Language, source));
-  const chain = (language: Language): FluentBundle[] =>
-    [bundles.get(language), bundles.get('en')].filter((one) => one !== undefined);
+  const english = bundleOf('en', sources.en);
+  const chains = new Map<Language, readonly FluentBundle[]>([['en', [english]]]);
+  // To read the sentences of a language takes as long as to answer a hundred messages: each waits for its first reply.
+  const chain = (language: Language): readonly FluentBundle[] => {
+    const known = chains.get(language);
+    if (known !== undefined) return known;
+    const source = sources[language];
+    const made = source === undefined ? [english] : [bundleOf(language, source), english];
+    chains.set(language, made);
+    return made;
+  };
   return (reply) => {
     const sayLine = (line: Line): string => withCapital(format(chain(line.language ?? reply.language), line));
     const labelOf = (button: Reply['buttons'][number]): string =>

@@ -1,4 +1,5 @@
 import { expect, test } from 'vitest';
+import { LANGUAGES } from '../../../src/chat/reader/words/languages.ts';
 import { makeSay } from '../../../src/chat/replies/say.ts';
 import type { Line } from '../../../src/chat/replies/reply.ts';
 import { loadLocales } from '../../../src/edge/locales.ts';
@@ -65,6 +66,7 @@ test('a person’s words cannot become sentences of ours', () => {
   );
 });
 
-test('the locales that there are can be read', () => {
-  expect(() => makeSay(loadLocales())).not.toThrow();
+test.each(LANGUAGES)('the locale of %s can be read', (language) => {
+  const say = makeSay(loadLocales());
+  expect(say({ language, lines: [line('progress-done')], buttons: [] }).text).not.toBe('');
 });
