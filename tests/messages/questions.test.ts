@@ -17,7 +17,7 @@ const rowsOf = (name: string): Question[] =>
     .map((row) => JSON.parse(row) as Question);
 
 /** The languages whose questions are tried: a language is added when all of its rows hold. */
-const TRIED: readonly Language[] = ['en', 'es', 'fr', 'de'];
+const TRIED: readonly Language[] = ['en', 'es', 'fr', 'it', 'de'];
 
 describe.each(TRIED)('plain questions in %s', (language) => {
   const readingOf = (text: string) => readMessage(text, { ...READER_DEFAULTS, language }).readings[0];
