@@ -6,6 +6,7 @@ import type { LabelId } from '../words/words.ts';
 import type { Beside } from './figure-beside.ts';
 import { figureAfter, figureBefore, figureBeside, hasForeignUnit, labelAt } from './figure-beside.ts';
 import { keepFigure } from './keep-labelled.ts';
+import { percentOfVolume } from './percent-of-volume.ts';
 import { isWishedLevel } from './wished-level.ts';
 
 function isRangeAt(board: Board, { at, to }: Beside): number | undefined {
@@ -155,7 +156,8 @@ export function findLabelled(board: Board, only?: LabelId): void {
       const label = labelAt(board, i);
       if (only !== undefined && label !== only) continue;
       if (findWish(board, i)) continue;
-      const isPercentVolume = label === 'volume' && isMark(board, i - 1, '%');
+      const isPercentVolume =
+        label === 'volume' && (isMark(board, i - 1, '%') || percentOfVolume(board, i) !== undefined);
       if (label !== undefined && !isPercentVolume && (label === 'so2' || label === 'volume') === weak)
         findLabel(board, i, label);
     }

@@ -2,6 +2,7 @@ import { celsiusSaid } from '../celsius-said.ts';
 import type { Board } from '../board.ts';
 import { figureAt, find, hasTag, isCue, isFree, isMark, refuse, termAt, setAside } from '../board.ts';
 import { isStranger } from '../stranger.ts';
+import { percentOfVolume } from './percent-of-volume.ts';
 
 const isPercent = (board: Board, i: number): boolean => isMark(board, i, '%') || isCue(board, i, 'percent');
 
@@ -56,7 +57,10 @@ function findDegrees(board: Board, i: number): void {
 export function findPercentAndDegree(board: Board): void {
   for (let i = 0; i < board.terms.length; i++) {
     if (!isFree(board, i)) continue;
-    if (isPercent(board, i + 1)) findPercent(board, i);
+    const byVolume = percentOfVolume(board, i + 1);
+    if (byVolume !== undefined)
+      find(board, 'alcohol_percent', figureAt(board, i).value, 'labelled', i, byVolume);
+    else if (isPercent(board, i + 1)) findPercent(board, i);
     else findDegrees(board, i);
   }
 }
