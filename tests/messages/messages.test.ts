@@ -41,6 +41,8 @@ describe('the own words, statements, moments, lots and remarks of a message are 
       'en-commands.jsonl',
       'en-law.jsonl',
       'en-lab.jsonl',
+      'it/cellar.jsonl',
+      'it/more.jsonl',
       'es/cellar.jsonl',
       'es/floor.jsonl',
       'fr/cellar.jsonl',
