@@ -447,7 +447,7 @@ export const de: Words = {
     forecast: ['prognose', 'bindung', 'verschnitt', 'zu viel', 'zu viel so2', 'verlust', 'verluste'],
   },
   danger: {
-    unwell: ['schwindlig', 'schwindelig', 'schwindel', 'ubel', 'ubelkeit', 'erbricht', 'hustet', 'hustet nur noch', 'dampfe'],
+    unwell: ['schwindlig', 'schwindelig', 'schwindel', 'ubel', 'ubelkeit', 'erbricht', 'hustet', 'hustet nur noch', 'dampfe', 'husten', 'hustet stark', 'husten alle', 'wird schlecht', 'ist schlecht', 'kotzt', 'ubergibt sich'],
     mixed: ['gemischt', 'zusammengeschuttet', 'verschuttet', 'vermischt'],
     reactive: ['chlor', 'chlorreiniger', 'bleiche', 'javelwasser', 'saure'],
     smell: ['riecht', 'gestank', 'stinkt', 'geruch'],
@@ -468,7 +468,7 @@ export const de: Words = {
     person: [
       'jemand', 'kollege', 'kollegin', 'mann', 'frau', 'er', 'sie', 'arbeiter', 'arbeiterin', 'chef', 'sohn',
       'bruder', 'vater', 'person', 'praktikant', 'lehrling', 'azubi', 'freund', 'kind', 'mitarbeiter',
-      'kellermeister', 'helfer', 'aushilfe',
+      'kellermeister', 'helfer', 'aushilfe', 'alle', 'wir', 'ich', 'niemand', 'keiner', 'lehrmadchen', 'kellerarbeiter', 'geselle', 'schwester', 'tochter', 'mutter', 'nachbar', 'kumpel', 'leute',
     ],
     thing: [
       'schaum', 'tresterhut', 'tank', 'pumpe', 'schlauch', 'regal', 'preis', 'preise', 'markt', 'kiste',
@@ -481,7 +481,7 @@ export const de: Words = {
       'antwortet nicht', 'antwortet nicht mehr', 'reagiert nicht', 'reagiert nicht mehr', 'meldet sich nicht',
       'meldet sich nicht mehr', 'kommt nicht raus', 'kommt nicht heraus', 'kommt nicht mehr raus',
       'keine antwort', 'gibt keine antwort', 'eingeklemmt', 'sagt nichts mehr', 'nicht wieder herausgekommen',
-      'kommt nicht wieder', 'gibt keinen laut', 'kommt nicht mehr heraus',
+      'kommt nicht wieder', 'gibt keinen laut', 'kommt nicht mehr heraus', 'niemand antwortet', 'keiner antwortet', 'antwortet niemand', 'niemand meldet sich', 'gibt keine antwort mehr', 'ruhrt sich nicht', 'ruhrt sich nicht mehr',
     ],
     'went-in': [
       'in den tank', 'in den behalter', 'in die presse', 'in den tank gestiegen', 'im tank',
@@ -513,7 +513,7 @@ export const de: Words = {
     alarm: [
       'gasleck', 'gasleckage', 'krankenwagen', 'notfall', 'hilfe !', 'hilfe hilfe', 'rettungswagen', 'notarzt', 'ruf die 112',
       'ruft die 112', '112 rufen', 'vergiftet', 'eingeatmet', 'gasvergiftung', 'hat so2 eingeatmet',
-      'vergiftung', 'gasaustritt',
+      'vergiftung', 'gasaustritt', 'gas im keller', 'gas im raum', 'gas in der halle', 'gas im garkeller', 'so2 im keller', 'so2 im raum', 'co2 alarm', 'so2 alarm', 'gasalarm', 'gaswarner piept', 'gaswarner schlagt an', 'gasmelder piept', 'gaswarner geht los',
     ],
     elsewhere: [
       'telefon', 'handy', 'nachricht', 'mail', 'kunde', 'lieferant', 'ausgang', 'licht', 'labor', 'anruf',
