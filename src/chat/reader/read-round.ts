@@ -2,9 +2,11 @@ import type { Board } from './board.ts';
 import { isFree, placeOf } from './board.ts';
 import type { Command } from './command.ts';
 import { finishReading } from './finish-reading.ts';
+import { notUnderstood } from './not-understood.ts';
 import { readDraft } from './read-draft.ts';
 import type { Term } from './split-terms.ts';
 import { termIn } from './split-terms.ts';
+import { withHeading, type Heading } from './with-heading.ts';
 import type { Draft, Fields, Reading, ReaderSettings } from './understood.ts';
 
 /** A line read on its own. */
@@ -17,12 +19,11 @@ interface LineRead {
   readonly isPast: boolean;
   /** Figures in it that nothing could read. */
   readonly leftover: boolean;
+  /** The first figure in it that nothing claims. */
+  readonly left?: string;
   /** What it says of when and with which lot, as the first line of all lines. */
   readonly heading: Heading;
 }
-
-/** What the first line says of all lines beside their fields. */
-type Heading = Pick<Draft, 'when' | 'chemical_lot'>;
 
 /** A round: its readings and what the first line says of all. */
 export interface Round {
@@ -72,6 +73,7 @@ function readLine(terms: readonly Term[], setBoard: SetBoard): LineRead {
     draft = readDraft(board, { isNoTalk: true });
   }
   const { vessel, vessels } = draft.fields;
+  const left = board.terms.findIndex((_, i) => isFree(board, i));
   const says = (field: string): boolean => board.findings.some((finding) => finding.field === field);
   return {
     terms,
@@ -83,7 +85,8 @@ function readLine(terms: readonly Term[], setBoard: SetBoard): LineRead {
       board.problems.some(({ code }) => code === 'volume-not-positive'),
     isPast: board.pastTense,
     heading: headingOf(draft, board),
-    leftover: draft.intent === 'chat' && board.terms.some((_, i) => isFree(board, i)),
+    leftover: draft.intent === 'chat' && left >= 0,
+    ...(left >= 0 && { left: placeOf(board, left, left).text }),
   };
 }
 
@@ -107,24 +110,10 @@ function isRound(lines: readonly LineRead[]): boolean {
   return vessels.length >= 2 || lines.filter(({ hasVolume }) => hasVolume).length >= 2;
 }
 
-/** A line with figures that nothing could read, quoted. */
-function notUnderstood(board: Board): Reading {
-  const about = placeOf(board, 0, board.terms.length - 1).text;
-  return {
-    intent: 'chat',
-    fields: {},
-    assumed: {},
-    asks: [],
-    problems: [{ code: 'not-understood', about }],
-    setAside: [],
-    notes: [],
-    marks: {},
-    where: {},
-  };
-}
-
 const carriesFacts = ({ draft }: LineRead): boolean =>
   Object.keys(draft.fields).length > 0 || Object.keys(draft.marks).length > 0;
+
+const isDoubtful = ({ draft }: LineRead): boolean => draft.intent !== 'chat' && draft.problems.length > 0;
 
 /** Facts that may hold for several tanks: never a measured figure of one. */
 function sharedFields({
@@ -165,13 +154,14 @@ function groupsOf(lines: readonly LineRead[], opens: (line: LineRead) => boolean
   return groups;
 }
 
+const joined = (group: readonly LineRead[]): readonly Term[] =>
+  group.flatMap(({ terms }, i): readonly Term[] =>
+    i === 0 ? terms : [{ ...termIn(terms, 0), kind: 'break', text: '\n', tags: [] }, ...terms],
+  );
+
 /** Reads the lines of one vessel as one message. */
 function readTogether(group: readonly LineRead[], setBoard: SetBoard, isPast: boolean): Draft {
-  const board = setBoard(
-    group.flatMap(({ terms }, i): readonly Term[] =>
-      i === 0 ? terms : [{ ...termIn(terms, 0), kind: 'break', text: '\n', tags: [] }, ...terms],
-    ),
-  );
+  const board = setBoard(joined(group));
   if (isPast) board.marks.pastLine = true;
   return readDraft(board);
 }
@@ -189,17 +179,6 @@ function draftOf(
     : line.draft;
 }
 
-/** When and with which lot, as the first line says, for a line that does not say it itself. */
-function withHeading(draft: Draft, { when, chemical_lot }: Heading): Draft {
-  if (draft.intent === 'effect') return draft;
-  const isNamed =
-    draft.when?.day !== undefined || draft.when?.hours_ago !== undefined || when?.hours_ago !== undefined;
-  const own = draft.when && when?.day && !isNamed ? { ...draft.when, day: when.day } : draft.when;
-  const moment = own ?? when;
-  const lot = draft.chemical_lot ?? (draft.intent === 'added' ? chemical_lot : undefined);
-  return { ...draft, ...(moment && { when: moment }), ...(lot !== undefined && { chemical_lot: lot }) };
-}
-
 /**
  * Reads several lines as a round of tanks: each vessel a reading, lines below it its own, the first line shared.
  *
@@ -215,18 +194,37 @@ export function readRound(
   const read = lines.map((terms) => readLine(terms, setBoard));
   if (!isRound(read)) return undefined;
   const byVessel = read.filter(({ vessel }) => vessel !== undefined).length >= 2;
-  const [first] = read as [LineRead];
+  const isOpen = ({ vessel, hasVolume }: LineRead): boolean => (byVessel ? vessel !== undefined : hasVolume);
+  // Headings and greetings may stand above what holds for all.
+  const telling = read
+    .slice(
+      0,
+      read.findIndex((line) => isTitration(line) || isOpen(line)),
+    )
+    .filter(
+      (line) => carriesFacts(line) || isDoubtful(line) || line.isPast || Object.keys(line.heading).length > 0,
+    );
+  const [first] = (telling.length === 0 ? read : telling.length > 1 ? [readLine(joined(telling), setBoard)] : telling) as [LineRead]; // prettier-ignore
   // `AO 20 mL sample 0.01 N` above `T4 1.9` and `T5 1.2`: what holds for all their titrations.
   const lab =
     first.vessel === undefined && first.draft.titration?.titrant_mL === undefined && isTitration(first);
   const opens = (line: LineRead): boolean => {
     if (isTitration(line)) return !(lab && line === first);
-    return byVessel ? line.vessel !== undefined : line.hasVolume;
+    return isOpen(line);
   };
   const isPast = first.isPast && !opens(first);
   const isShared = !opens(first) && carriesFacts(first) && first.draft.problems.length === 0;
   const shared = isShared ? { ...first.draft, fields: sharedFields(first.draft.fields) } : undefined;
   const heading = opens(first) ? {} : first.heading;
+  // What holds for all and cannot be read makes all of them a question: `target 30-35`.
+  const doubts: Reading['problems'] =
+    opens(first) || lab
+      ? []
+      : isDoubtful(first)
+        ? first.draft.problems
+        : first.left !== undefined && carriesFacts(first)
+          ? [{ code: 'ambiguous-number', about: first.left }]
+          : [];
   const isMixed = read.some((line) => opens(line) && line.draft.command === undefined);
   const readings = groupsOf(read, opens).map((group): Reading => {
     const [line] = group;
@@ -235,7 +233,10 @@ export function readRound(
     const draft = lab
       ? readTogether([first, ...group], setBoard, false)
       : draftOf(group, setBoard, { isPast, isMixed });
-    return finishReading(withHeading(withShared(draft, shared), heading), settings, shared?.fields);
+    const reading = finishReading(withHeading(withShared(draft, shared), heading), settings, shared?.fields);
+    return doubts.length === 0
+      ? reading
+      : { ...reading, asks: [], problems: [...reading.problems, ...doubts] };
   });
   return { readings, shared: shared?.fields ?? {} };
 }

@@ -4,7 +4,7 @@ import { isCellarTalk } from '../cellar-talk.ts';
 import { isStranger } from '../stranger.ts';
 import { concentrationAt } from '../units.ts';
 import type { Aim } from './aim.ts';
-import { aimAt, isArrow, keepAddition, keepTarget, kindAt, skipJoins } from './aim.ts';
+import { aimAt, isArrow, isOther, keepAddition, keepTarget, kindAt, skipJoins } from './aim.ts';
 
 /** The figure that a verb at term `i` governs: `add 28 ppm`, `target free 35`; and whether "to" leads to it. */
 function governed(board: Board, i: number): { aim: Aim; label?: Aim['kind']; leadsTo: boolean } | undefined {
@@ -73,11 +73,20 @@ function isAt(board: Board, i: number, { aim, label }: { aim: Aim; label?: Aim['
   return true;
 }
 
+/** `target 30-35`: two figures, of which one has to be chosen. */
+const isRange = (board: Board, { to }: Aim): boolean =>
+  isMark(board, to + 1, '-') &&
+  !termAt(board, to + 1).gap &&
+  board.terms[to + 2]?.gap === false &&
+  isFree(board, to + 2) &&
+  !isOther(board, to + 3);
+
 function findVerb(board: Board, i: number): void {
   if (isCue(board, i, 'need') && isCue(board, i + 1, 'to')) return;
   const found = governed(board, i);
   if (!found) return;
   const { aim, label, leadsTo } = found;
+  if (isRange(board, aim)) return refuse(board, 'ambiguous-number', aim.from, aim.to + 2);
   if (isCue(board, i, 'need') && label === 'ph') return;
   if (isAt(board, i, found)) return;
   if (declines(board, i)) return refuse(board, 'ambiguous-number', i - 1, aim.to);

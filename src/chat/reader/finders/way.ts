@@ -39,6 +39,11 @@ function findWayAt(board: Board, i: number): boolean {
   if (!firm && !isCellarTalk(board)) return false;
   const isFrom = (k: number): boolean => isCue(board, k, 'from') || isCue(board, k, 'from-too');
   const said = isFrom(i - 1) || isFrom(labelAt - 1);
+  // `target 30 to 35`, `add 20 to 25`: a range of what is wanted, and no way from one to the other.
+  if (!arrow && (isCue(board, i - 1, 'target') || isCue(board, isFrom(i - 1) ? i - 2 : i - 1, 'add'))) {
+    refuse(board, 'ambiguous-number', i, second.to);
+    return true;
+  }
   const start = isFrom(i - 1) ? i - 1 : before ? labelAt : i;
   if (second.kind === 'molecular') {
     find(board, 'free_mg_L', first.mg_L, 'labelled', start, first.to);
