@@ -949,7 +949,7 @@ help-people-2 = personas → quién está dentro
 help-people-3 = invitar operario → un código para una persona; también encargado, visitante
 help-people-4 = Un encargado puede todo, un operario dosifica y anota, un visitante mira.
 help-people-5 = lee todo → contesto lecturas claras sin que me llamen
-help-people-6 = estamos en → en qué bodega estamos; estamos en Blanca: otra
+help-people-6 = estamos en → en qué bodega; estamos en Blanca: ir allí; salir de Blanca: dejarla
 help-people-7 = olvídame → tu nombre y número se quitan
 help-lab-1 = Una valoración se calcula con su desarrollo; no se guarda nada antes de que toques.
 help-lab-2 = AO 20 mL muestra, 1,9 mL 0,01 N → SO2 libre; con T4 delante se guarda con un toque
@@ -1973,7 +1973,7 @@ picture-nothing = Sin gráfica de { $vessel }: todavía no se ha medido SO2 en e
 
 # Preguntas sueltas: la respuesta, una cifra con su fuente, y qué enviar después.
 question-small-or-large = Menos y más grandes. Una adición pequeña puede combinarse entera y no dejar libre.
-question-small-or-large-why = De una adición queda libre del 35 al 67 %; las cifras publicadas no coinciden, así que mide al día siguiente.
+question-small-or-large-why = De una adición queda libre del 35 al 67 % (AWRI; un manual, de memoria); las cifras no coinciden, así que mide al día siguiente.
 question-small-or-large-next = Para tu vino: T4 55 hl pH 3,58 libre 21
 question-how-often = Depósitos cada mes más o menos, barricas cada dos semanas, y un día después de cada adición (práctica común, sin fuente).
 question-how-often-why = Antes si hace calor, está a medio llenar o bajo de libre.
@@ -2045,7 +2045,7 @@ question-too-much = No eches más. Tiempo, aire y trasiegos bajan el libre; mezc
 question-too-much-why = Desde unos 2 mg/L de molecular se huele (Understanding Wine Chemistry, 2016). Agua oxigenada: solo alguien cualificado, donde la ley lo permita.
 question-too-much-next = Cómo está: T4?
 question-no-sulfite = Se puede, y entonces el vino depende de frío, limpieza, depósitos llenos, pH bajo y venta rápida.
-question-no-sulfite-why = La levadura hace algo por su cuenta, normalmente menos de 30 mg/L: "sin sulfitos añadidos" no es "sin sulfitos".
+question-no-sulfite-why = La levadura hace algo por su cuenta, normalmente menos de 30 mg/L (artículo de aficionados): "sin sulfitos añadidos" no es "sin sulfitos".
 question-no-sulfite-next = Lo que tiene: T4 pH 3,5 libre 5
 question-bottling = Mide unos días antes; la última adición va antes de arrancar la línea, mezclada y medida.
 question-bottling-why = Cada mg/L de oxígeno que entra puede gastar hasta 4 mg/L de libre (por fórmula).
@@ -2144,8 +2144,8 @@ titration-result = { $vessel ->
 titration-too-much = Más de lo que lleva un vino: revisa la muestra, la bureta y la fuerza del valorante. No se guarda.
 titration-molar = Yodo { $molar } M es { $normal } N: un mol toma dos.
 titration-ascorbic-asked = El yodo cuenta también el ácido ascórbico: { $amount } mg/L de él se leen como +{ $counts } { $unit }. Si lleva, añade “ascórbico { $amount }”.
-titration-precision = Dos resultados de un vino pueden diferir { $again } en un laboratorio, { $other } entre dos (publicado).
-titration-red-high = Un tinto: los métodos que acidifican leen el libre por alto, en un estudio hasta un 66 %. No se resta nada; usa siempre un mismo método.
+titration-precision = Dos resultados de un vino pueden diferir { $again } en un laboratorio (OIV, de memoria), { $other } entre dos (CEE 2676/90).
+titration-red-high = Un tinto: los métodos que acidifican leen el libre por alto, en un estudio hasta un 66 % (Virginia, 2022). No se resta nada; usa siempre un mismo método.
 titration-name-vessel = Para guardarlo como lectura, pon el depósito delante: T4 …
 titration-read = Leído: { $list }.
 titration-sample = muestra { $volume } mL
@@ -2267,7 +2267,7 @@ forecast-steady = { $vessel }: según sus lecturas el libre no baja; { $from ->
 }
 forecast-by-readings = Por { $count } lecturas desde la última adición: se pierde un { $lost } % en 30 días.
 forecast-by-rates = { $container ->
-    [bottle] Por un estudio de botellas, no por este vino: tras 3 años queda un 45 % a 14 °C, un 20 % a 15–26 °C.
+    [bottle] Por un estudio de botellas (según un sitio de vino de Quebec), no por este vino: tras 3 años queda un 45 % a 14 °C, un 20 % a 15–26 °C.
    *[other] Por lo que pierden las barricas, no por este vino: 3–10 mg/L al mes (práctica común, sin fuente). { $fewest } lecturas dicen lo suyo; hay { $number ->
         [one] una
        *[many] { $count }
@@ -2280,7 +2280,7 @@ forecast-measure = { $from ->
 }
 forecast-need = Pide { $needed }: pH { $ph } ({ $day }), { $molecular } molecular.
 forecast-none = { $vessel }: { $why ->
-    [unmeasured] sin libre medido desde su última adición. Mídelo y pregunta otra vez.
+    [unmeasured] sin libre medido desde su última adición, trasiego, cambio de depósito o embotellado. Mídelo y pregunta otra vez.
     [below-already] el libre está en los { $needed } { $unit } que pide su pH, o por debajo. Envía la lectura para una dosis.
    *[no-rate] todavía sin previsión. No hay dato de lo que pierden los depósitos, y lo suyo pide { $fewest } lecturas desde la última adición; hay { $number ->
         [one] una
