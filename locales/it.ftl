@@ -461,10 +461,10 @@ nothing-why-free = { $free } di libera; l’obiettivo è { target }.
 
 adds =
     { $number ->
-        [many] { at }{ $list } aggiungono { $adds } di SO2
-       *[one] { at }{ $list } aggiunge { $adds } di SO2
+        [many] { at }{ $list } danno { $adds } di SO2
+       *[one] { at }{ $list } danno { $adds } di SO2
     }
-adds-rate = { at }“{ $rate }” ({ $ofAdditive } di { additive }) aggiunge { $adds } di SO2
+adds-rate = { at }“{ $rate }” ({ $ofAdditive } di { additive }) danno { $adds } di SO2
 amount = { $amount } di { additive }
 amount-solution = { $amount } di { additive } { $strength } %
 amount-SO2 = { $amount } di SO2 da { additive }
