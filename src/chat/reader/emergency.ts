@@ -122,12 +122,17 @@ function isGasLeak(hits: Hits, words: readonly string[]): boolean {
   return gases.some((gas) => literal(hits, 'leak').some((leak) => Math.abs(leak.from - gas.from) <= 8));
 }
 
+/** `Kollege in Tank 4 gefallen`: what stands behind "in" is where, and not what fell. */
+const isPlace = (hits: Hits, { from }: Hit): boolean =>
+  all(hits, 'beside').some((hit) => hit.from < from && from - hit.from <= 2);
+
 /** `he dropped a hose, it fell into the tank`: a thing stands between the person and the fall. */
 const isDropped = (hits: Hits): boolean =>
   all(hits, 'fell').every((fall) =>
     all(hits, 'thing').some(
       (thing) =>
         thing.to < fall.from &&
+        !isPlace(hits, thing) &&
         all(hits, 'person').every((person) => person.to < thing.from || person.from > fall.to),
     ),
   );

@@ -128,11 +128,20 @@ function findPlus(board: Board, i: number): void {
   if (aim && isClear(board, i, { aim })) keepAddition(board, aim, i);
 }
 
+/** `plus 20 mg/l`: beside a figure with its unit the word is the sign; behind another figure it may join two. */
+function findPlusInWords(board: Board, i: number): void {
+  const aim = aimAt(board, i + 1);
+  if (aim === undefined) return;
+  if (board.terms[i - 1]?.kind === 'number') refuse(board, 'ambiguous-number', i, aim.to);
+  else keepAddition(board, aim, i);
+}
+
 /** Finds what a verb, an arrow or a plus sign aims at: a level of SO2, or a stated addition. */
 export function findTarget(board: Board): void {
   for (let i = 0; i < board.terms.length; i++) {
     if (board.taken[i] === true) continue;
     if (isMark(board, i, '+')) findPlus(board, i);
+    else if (isCue(board, i, 'plus') && concentrationAt(board, i + 2)) findPlusInWords(board, i);
     else if (termAt(board, i).kind !== 'number' && isVerb(board, i)) findVerb(board, i);
   }
 }
