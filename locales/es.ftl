@@ -496,12 +496,12 @@ solution-too-cold = No: { $wanted } g/L en agua a { $water } °C. Publicado hay 
 solution-colder = No hay cifra publicada por debajo de { $celsius } °C: mira que se haya disuelto toda.
 solution-holding = Solución de conservación, { $volume }: { $acid } de ácido cítrico, { $amount } de { additive }.
 solution-rinse = Enjuague, { $volume }: { $acid } de ácido cítrico, { $amount } de { additive }.
-solution-order = Primero toda el agua, luego el ácido, el sulfito al final y poco a poco. Nunca polvo sobre el ácido.
+solution-order = Toda el agua, luego el ácido, al final el sulfito, poco a poco. Nunca polvo sobre ácido.
 solution-air = Desprende SO2: ventila, aparta la cara, también de la boca de la barrica.
 solution-for-holding = Para barrica vacía y limpia, hasta la boca; revísala cada pocas semanas.
 solution-for-rinse = Para material limpio: moja todo y deja actuar unos minutos.
 solution-drain = Viértela según las normas locales. Enjuaga con agua antes del vino.
-solution-practice = { $salt } y { $acid } g/L: práctica común, sin fuente. Tu propia cifra: { $use ->
+solution-practice = { $salt } y { $acid } g/L: práctica común, sin fuente. Otra cifra: { $use ->
         [holding] solución de conservación { $litres } L meta al 1%
        *[rinse] enjuague { $litres } L meta al 1%
     }
