@@ -498,11 +498,11 @@ solution-colder = Unter { $celsius } °C ist keine Zahl veröffentlicht: schau, 
 solution-holding = Konservierungslösung, { $volume }: { $acid } Zitronensäure, { $amount } { additive }.
 solution-rinse = Spüllösung, { $volume }: { $acid } Zitronensäure, { $amount } { additive }.
 solution-order = Erst alles Wasser, dann die Säure, zuletzt nach und nach das Sulfit. Nie Pulver auf Säure.
-solution-air = SO2 wird frei: lüften, Gesicht weg (Spundloch).
-solution-for-holding = Fürs leere, saubere Fass, spundvoll; regelmäßig prüfen, alle paar Wochen.
+solution-air = SO2 wird frei: lüften, Gesicht weg vom Loch.
+solution-for-holding = Fürs leere, saubere Fass, spundvoll; alle paar Wochen prüfen.
 solution-for-rinse = Für sauberes Gerät: alles benetzen, ein paar Minuten wirken lassen.
 solution-drain = Ablassen nach örtlichen Regeln; vor dem Wein mit Wasser spülen.
-solution-practice = { $salt } und { $acid } g/L: üblich, ohne Quelle. Deine eigene Zahl: { $use ->
+solution-practice = { $salt } und { $acid } g/L: üblich, ohne Quelle. Eigene Zahl: { $use ->
         [holding] Konservierungslösung { $litres } L KDS 1%
        *[rinse] Spüllösung { $litres } L KDS 1%
     }
