@@ -39,16 +39,18 @@ function shareVolume(board: Board, fields: Record<string, unknown>): void {
 /** What may be said of each of several vessels. */
 const AMOUNTS = ['mass_g', 'additive_volume_mL', 'tablets'] as const;
 
-/** `10 g kmbs each B1-B6`: the amount is of each vessel, and as a volume does it stands for all of them. */
+/** `10 g kmbs each B1-B6`, `10 g per barrel, 12 barrels`: the amount is of each, and as a volume does it stands for all. */
 function shareAmount(board: Board, fields: Record<string, unknown>): void {
-  const vessels = findingOf(board, 'vessels')?.value;
-  if (vessels === undefined) return;
+  const count = findingOf(board, 'vessels')?.value.length ?? board.marks.containers ?? 1;
+  if (count < 2) return;
   for (const field of AMOUNTS) {
     const place = findingOf(board, field);
     if (place === undefined) continue;
-    const isBeside = [1, 2, 3].some((k) => isCue(board, place.to + k, 'each'));
+    const isBeside = [1, 2, 3].some(
+      (k) => isCue(board, place.to + k, 'each') || isCue(board, place.to + k, 'per-barrel'),
+    );
     const isAlone = findingOf(board, 'volume_L') === undefined && holdsCue(board, 'each');
-    if (isBeside || isAlone) fields[field] = place.value * vessels.length;
+    if (isBeside || isAlone) fields[field] = place.value * count;
   }
 }
 

@@ -9,6 +9,7 @@ import { findLawFacts } from './finders/law-facts.ts';
 import { findKind } from './finders/kind.ts';
 import { findLabelled } from './finders/labels.ts';
 import { findLetterPair } from './finders/letter-pair.ts';
+import { findLookAlike } from './finders/look-alike.ts';
 import { findMass } from './finders/mass.ts';
 import { findMixedSample } from './finders/mixed-sample.ts';
 import { findNumberWord } from './finders/number-word.ts';
@@ -45,6 +46,7 @@ const FINDERS: readonly Finder[] = [
   findChemicalLot,
   findWhen,
   findPlusMinus,
+  findLookAlike,
   findLetterPair,
   findVessel,
   findLawFacts,

@@ -34,6 +34,10 @@ const isPlainWord = (board: Board, i: number): boolean => {
   return term?.kind === 'word' && board.taken[i] !== true && term.tags.length === 0 && term.text.length >= 3;
 };
 
+/** `500 g malo bacteria`, `500 g of water`: right behind an amount it is what the amount is of, whatever else it says. */
+const isNamedAsStuff = (board: Board, i: number): boolean =>
+  hasTag(board, i, 'additive:none') || isCue(board, i, 'water');
+
 /** Another chemical beside a sulfite: named as not used; in a solution with water it is refused, for acid or chlorine sets gas free. */
 function nameOnly(board: Board, i: number): void {
   if (board.marks.solutionUse !== undefined) return refuseWord(board, i);
@@ -75,6 +79,7 @@ export function findOtherAdditive(board: Board): void {
     const before = isBetween(board, amount.from - 1) ? amount.from - 2 : amount.from - 1;
     const bag = isCue(board, amount.to + 1, 'bag');
     if (isNone(after) || (bag && isStrangerIn(board, after))) return refuseWord(board, after);
+    if (!named && isNamedAsStuff(board, after)) return refuseWord(board, after);
     if (isNone(before)) return refuseWord(board, before);
     if (!named && isPlainWord(board, after) && after <= amount.to + 2 && !isBetween(board, after))
       return refuseWord(board, after);

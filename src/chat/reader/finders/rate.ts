@@ -42,17 +42,13 @@ function baseAt(
   return { volume_L, to: volume.to, ...(volume.id === 'gal' && { gallon: true as const }) };
 }
 
-/** `40 g per barrel`: a mass for a usual barrel; with a volume beside it, nobody knows of which. */
+/** `40 g per barrel`: a mass for a usual barrel; with a volume beside it, nobody knows of which barrel. */
 function findPerBarrel(board: Board, i: number, unit: UnitAt): void {
-  if (
-    isFound(board, 'vessels') ||
-    board.cues.has('unit:L') ||
-    board.cues.has('unit:gal') ||
-    board.terms.some(
-      (_, k) => board.terms[k + 1] !== undefined && isFree(board, k) && hasTag(board, k + 1, 'vessel:barrel'),
-    )
-  )
+  if (board.cues.has('unit:L') || board.cues.has('unit:gal'))
     return refuse(board, 'ambiguous-number', i, unit.to + 1);
+  const areCounted = board.terms.some((_, k) => isFree(board, k) && hasTag(board, k + 1, 'vessel:barrel'));
+  // Beside several of them it stands for all.
+  if (areCounted || isFound(board, 'vessels')) return;
   board.marks.barrelsAssumed_L = USUAL_BARREL_L;
   board.marks.volumeUnit ??= 'barrel';
   claim(board, unit.to + 1, unit.to + 1);

@@ -121,11 +121,22 @@ const isVerb = (board: Board, i: number): boolean =>
   (isCue(board, i, 'by') && holdsCue(board, 'raise')) ||
   (['target', 'add', 'raise', 'need', 'to'] as const).some((cue) => isCue(board, i, cue));
 
-/** `+25 ppm`: a plus sign glued to its figure. */
+/** `+25 ppm`: a plus sign before its figure. */
 function findPlus(board: Board, i: number): void {
   const opens = termAt(board, i).gap || board.terms[i - 1]?.kind !== 'number';
-  const aim = opens && board.terms[i + 1]?.gap === false ? aimAt(board, i + 1) : undefined;
-  if (aim && isClear(board, i, { aim })) keepAddition(board, aim, i);
+  const aim = opens ? aimAt(board, i + 1) : undefined;
+  if (aim === undefined) return;
+  if (board.terms[i + 1]?.gap === false) {
+    if (isClear(board, i, { aim })) keepAddition(board, aim, i);
+  } else findSpacedPlus(board, i, aim);
+}
+
+/** `+ 25 ppm` adds; behind another figure, or without its unit, it may join two things as well. */
+function findSpacedPlus(board: Board, i: number, aim: Aim): void {
+  const joins = board.terms[i - 1]?.kind === 'number';
+  if (joins || concentrationAt(board, i + 2) === undefined)
+    return refuse(board, 'ambiguous-number', i, aim.to);
+  if (isClear(board, i, { aim })) keepAddition(board, aim, i);
 }
 
 /** `plus 20 mg/l`: beside a figure with its unit the word is the sign; behind another figure it may join two. */

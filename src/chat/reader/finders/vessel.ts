@@ -60,6 +60,8 @@ function worded(board: Board, i: number): Named | undefined {
   if (k > i + 3) return undefined;
   if (isWholeAt(board, k) && !hasOwnUnit(board, k)) {
     if (isCue(board, k + 1, 'times') || isMark(board, k + 1, '×')) return undefined;
+    // `10 g/barrel 12 barrels`: twelve of them, and none with that number.
+    if (isMark(board, i - 1, '/') && hasTag(board, k + 1, 'vessel:barrel')) return undefined;
     const { letter, to } = suffix(board, k);
     const number = Number(termAt(board, k).text);
     return { name: `${kind} ${number}${letter}`, kind, ...(letter ? {} : { number }), from: i, to };

@@ -541,7 +541,7 @@ export const en: Words = {
       'sulfite soln', 'bisulfite soln', 'sulphite soln', 'bisulphite soln', 'sulfiting agent',
       'sulphiting agent', 'sulfit', 'sulphit', 'bisulfite powder', 'sulfite stock', 'sulphite stock',
     ],
-    'additive:none': [
+    'additive:none': ['yeast', 'yeasts', 'bacteria', 'malo bacteria', 'ml bacteria', 'malolactic bacteria', 'mlf bacteria', 'grape concentrate', 
       'bentonite', 'tartaric', 'tartaric acid', 'citric', 'citric acid', 'ascorbic', 'ascorbic acid',
       'vitamin c', 'sorbate', 'potassium sorbate', 'k sorbate', 'copper', 'copper sulfate', 'copper sulphate',
       'cuso4', 'dap', 'diammonium phosphate', 'nutrient', 'nutrients', 'yeast nutrient', 'yeast hulls',
