@@ -74,6 +74,10 @@ const isBullet = (board: Board, i: number): boolean => {
   );
 };
 
+/** `from 20 to 12 brix`: the unit behind the second figure is of both. */
+const fallsFrom = (board: Board, i: number): number =>
+  isCue(board, i - 1, 'to') && isFree(board, i - 2) && !isLabelBefore(board, i - 2) ? i - 2 : i;
+
 /** Sets aside dates, times, vintages, lots and figures with units that are none of ours. */
 export function findOtherFigures(board: Board): void {
   for (let i = 0; i < board.terms.length; i++) {
@@ -93,6 +97,7 @@ export function findOtherFigures(board: Board): void {
     const end = short ?? dateEnd(board, i) ?? clockEnd(board, i) ?? named ?? vintageEnd(board, i);
     const labelled = end === named && named === i && !isCue(board, i - 1, 'month');
     if (end !== undefined) setAside(board, labelled ? i - 1 : from, end);
-    else if (hasTag(board, i + 1, 'unit:none-of-ours') && !isLabelBefore(board, i)) setAside(board, i, i + 1);
+    else if (hasTag(board, i + 1, 'unit:none-of-ours') && !isLabelBefore(board, i))
+      setAside(board, fallsFrom(board, i), i + 1);
   }
 }
