@@ -25,6 +25,7 @@ for (const file of [
   'emergency.jsonl',
   'en-commands.jsonl',
   'en-lab.jsonl',
+  'en-hunt.jsonl',
   ...ofLanguages,
 ]) {
   describe(`messages of ${file} are read as their labels say`, () => {

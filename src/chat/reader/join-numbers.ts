@@ -101,6 +101,13 @@ function isClaimedBefore(terms: readonly Term[], i: number): boolean {
   return k >= 0 && has(terms[k], CLAIMS_NEXT) && !hasOwnFigure(terms, k);
 }
 
+/** `target T8 30 640 gal`: the verb before a vessel claims the figure behind it. */
+function isClaimedOverVessel(terms: readonly Term[], i: number): boolean {
+  const [verb, vessel, number] = [terms[i - 2], terms[i - 1], terms[i]];
+  if (number?.kind !== 'number' || !has(verb, /^cue:(target|raise|add)$/)) return false;
+  return has(vessel, /^vessel:/) || (vessel?.kind === 'word' && !number.gap);
+}
+
 /** `18/60 800 gal`, `18 / 60 800 gal`: the second of a pair. A stroke behind a labelled figure only parts fields. */
 function isBehindSlash(terms: readonly Term[], i: number): boolean {
   const slash = termIn(terms, i - 1);
@@ -156,6 +163,7 @@ function joinBlankGroups(terms: readonly Term[]): Term[] {
       last === i ||
       !unitFollows(terms, last + 1) ||
       isClaimedBefore(terms, i - 1) ||
+      isClaimedOverVessel(terms, i - 1) ||
       isGluedToWord(terms, i)
     ) {
       out.push(first);

@@ -113,7 +113,13 @@ function isRound(lines: readonly LineRead[]): boolean {
 const carriesFacts = ({ draft }: LineRead): boolean =>
   Object.keys(draft.fields).length > 0 || Object.keys(draft.marks).length > 0;
 
-const isDoubtful = ({ draft }: LineRead): boolean => draft.intent !== 'chat' && draft.problems.length > 0;
+/** `Cellar round 10/14`: a day and month above a list. */
+const DAY_AND_MONTH = /^(0?[1-9]|1[0-2])\/(0?[1-9]|[12]\d|3[01])$|^(0?[1-9]|[12]\d|3[01])\/(0?[1-9]|1[0-2])$/;
+
+/** What stands above a round and cannot be read; a date alone there is passed over. */
+const isDoubtful = (line: LineRead): boolean =>
+  line.draft.intent !== 'chat' &&
+  line.draft.problems.some(({ about }) => carriesFacts(line) || !DAY_AND_MONTH.test(about));
 
 /** Facts that may hold for several tanks: never a measured figure of one. */
 function sharedFields({

@@ -53,6 +53,18 @@ let known: ReadonlyMap<string, number> | undefined;
 /** Built when the first message comes. */
 const knownWords = (): ReadonlyMap<string, number> => (known ??= languagesOfWords(ALL_WORDS));
 
+let grapes: RegExp | undefined;
+
+/** `sauv blanc`: the names of several words, none of which tells a language. */
+const namesOfGrapes = (): RegExp => {
+  if (grapes !== undefined) return grapes;
+  const names = ALL_WORDS.flatMap(({ says }) => says['cue:variety'] ?? []).filter((name) =>
+    name.includes(' '),
+  );
+  grapes = new RegExp(`\\b(?:${[...new Set(names)].join('|')})\\b`, 'g');
+  return grapes;
+};
+
 /** From this length one word alone tells a second language; own threshold. */
 const CLEAR_LENGTH = 6;
 
@@ -79,7 +91,7 @@ const countOf = (mask: number): number => {
  * ```
  */
 export function tellLanguages(text: string, chat: Language): ToldLanguages {
-  const words = text.match(WORD) ?? [];
+  const words = text.replaceAll(namesOfGrapes(), ' ').match(WORD) ?? [];
   const masks = words.flatMap((word) => (word.length > 1 ? (knownWords().get(word) ?? []) : []));
   const scoreOf = (n: number, shift: number): number => {
     let score = 0;

@@ -1,6 +1,7 @@
 import type { Board } from '../board.ts';
 import { hasTag, holdsCue, isCue, isFree, isMark, refuse, setAside, termAt } from '../board.ts';
 import { isCellarTalk } from '../cellar-talk.ts';
+import { isPhLike } from '../ph-like.ts';
 import { isStranger } from '../stranger.ts';
 import { concentrationAt } from '../units.ts';
 import type { Aim } from './aim.ts';
@@ -11,12 +12,30 @@ function governed(board: Board, i: number): { aim: Aim; label?: Aim['kind']; lea
   let k = skipJoins(board, i + 1);
   // `before adding: free 18`: behind a colon a label begins anew.
   const isApart = isCue(board, i, 'add') && isMark(board, i + 1, ':');
+  const beyond = isApart ? undefined : vesselEnd(board, k);
+  if (beyond !== undefined) return governedBeyond(board, i, beyond);
   if (isApart && kindAt(board, k) !== undefined) return undefined;
   const label = kindAt(board, k) ?? (hasTag(board, k, 'label:so2') ? 'free' : undefined);
   if (label !== undefined) k = skipJoins(board, k + 1);
   const aim = aimAt(board, k);
   const leadsTo = board.terms.slice(i + 1, k).some((_, at) => isCue(board, i + 1 + at, 'to'));
   return aim && { aim, leadsTo, ...(label ? { label } : {}) };
+}
+
+/** Where the vessel ends that stands at term `k`. */
+const vesselEnd = (board: Board, k: number): number | undefined =>
+  board.findings.find(({ field, from }) => (field === 'vessel' || field === 'vessels') && from === k)?.to;
+
+/** `raise T8 15 ppm`, `target T8 30`: the figure that a verb governs over the vessel; a bare pH is none. */
+function governedBeyond(board: Board, i: number, to: number): { aim: Aim; leadsTo: boolean } | undefined {
+  const isVerbOfVessel =
+    isCue(board, i, 'target') ||
+    ((isCue(board, i, 'raise') || isCue(board, i, 'add')) && !isStranger(board, i - 1));
+  const k = skipJoins(board, to + 1);
+  const aim = isPhLike(board, k) || !isVerbOfVessel ? undefined : aimAt(board, k);
+  const isFirm = concentrationAt(board, k + 1) !== undefined || isCue(board, i, 'target');
+  if (aim === undefined || aim.kind !== undefined || !isFirm) return undefined;
+  return { aim, leadsTo: isCue(board, k - 1, 'to') };
 }
 
 /** A bare figure is an aim only where the message speaks of wine and nothing foreign stands beside it. */
@@ -53,6 +72,8 @@ function isRaised(board: Board, i: number): boolean {
     k >= 0 &&
     !isCue(board, k, 'raise') &&
     (board.taken[k] === true ||
+      // `amener la cuve 7 (49 hl, libre 16) à 30`
+      (isMark(board, i - 1, ')') && ['(', ')', ','].some((mark) => isMark(board, k, mark))) ||
       isCue(board, k, 'article') ||
       hasTag(board, k, 'label:free') ||
       hasTag(board, k, 'label:so2') ||
@@ -102,7 +123,10 @@ function findVerb(board: Board, i: number): void {
   if (isCue(board, i, 'need')) return findNeed(board, i, found);
   // `raise free to 30` says where it should go, `raise free 30` by how much.
   if (isCue(board, i, 'add') || isCue(board, i, 'raise') || isCue(board, i, 'by'))
-    return leadsTo ? keepTarget(board, aim, i, label) : keepAddition(board, aim, i);
+    // `dose T4 18 ppm`: what is to go in, or the dose of a wine with 18?
+    if (isCue(board, i, 'how-much') && board.taken[aim.from - 1] === true)
+      return refuse(board, 'ambiguous-number', aim.from, aim.to);
+    else return leadsTo ? keepTarget(board, aim, i, label) : keepAddition(board, aim, i);
   if (isCue(board, i, 'to')) keepTarget(board, aim, i, label);
 }
 

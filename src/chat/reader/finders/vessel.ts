@@ -60,6 +60,9 @@ function worded(board: Board, i: number): Named | undefined {
   if (k > i + 3) return undefined;
   if (isWholeAt(board, k) && !hasOwnUnit(board, k)) {
     if (isCue(board, k + 1, 'times') || isMark(board, k + 1, '×')) return undefined;
+    // `12 barrels 2 tablets of 5 g each`: two tablets for each of twelve.
+    if (isWholeAt(board, i - 1) && saysMany(termAt(board, i)) && isCue(board, k + 1, 'tablet'))
+      return undefined;
     // `10 g/barrel 12 barrels`: twelve of them, and none with that number.
     if (isMark(board, i - 1, '/') && hasTag(board, k + 1, 'vessel:barrel')) return undefined;
     const { letter, to } = suffix(board, k);
@@ -211,15 +214,14 @@ function leftOut(board: Board, first: Named, to: number): { numbers: readonly nu
   return { numbers, to: end };
 }
 
-/** `tanks 4 and 5`: where the number of another vessel stands, which is never its free SO2. */
+/** `tanks 4 and 5`, `barrels 3, 5 and 9`: where the last number of the others stands, none of which is free SO2. */
 function anotherNumber(board: Board, { kind, from, to }: Named): number | undefined {
-  const isAnother =
-    kindOf(board, from) === kind &&
-    saysMany(termAt(board, from)) &&
-    isCue(board, to + 1, 'and') &&
-    isWholeAt(board, to + 2) &&
-    !hasOwnUnit(board, to + 2);
-  return isAnother ? to + 2 : undefined;
+  if (kindOf(board, from) !== kind || !saysMany(termAt(board, from))) return undefined;
+  let last = to;
+  const joins = (k: number): boolean =>
+    isCue(board, k, 'and') || isMark(board, k, ',') || isMark(board, k, '&');
+  while (joins(last + 1) && isWholeAt(board, last + 2) && !hasOwnUnit(board, last + 2)) last += 2;
+  return last > to ? last : undefined;
 }
 
 /** Finds the vessel: a tank or barrel word with its number, or a code; `B1-B24` is that many vessels. */

@@ -73,7 +73,7 @@ export const en: Words = {
       'lab no', 'lab number', 'ext', 'cold stab', 'og', 'fg', 'd o', 'diss oxygen', 'dissolved o2', 'iron', 'fe', 'cu', 'copper', 'potassium', 'calcium', 'magnesium', 'sodium', 'chlorine', 'chloride', 'histamine', 'lead', 'tannin', 'tannins', 'nitrate', 'nitrogen', 'ammonia', 'nh3', 'ethyl acetate', 'acetaldehyde', 'h2s', 'hardness', 'conductivity', 'orp', 'redox', 'fan', 'nopa', 'yanc', 'amino n', 'amino nitrogen', 'free amino nitrogen', 'free amino n', 'alpha amino', 'assimilable nitrogen', 'phenolics', 'total phenolics', 'phenols', 'total phenols', 'anthocyanins', 'anthocyanin', 'total anthocyanins', 'glycerol', 'tartaric', 'citric', 'succinic', 'gluconic', 'laccase', 'protein', 'heat stab', 'buffer', 'phi', 'rh', 'humidity', 't a', 'v a', 'extract', 'dry extract', 'sulfate', 'sulphate', 'sorbic', 'sorbate level', 'microns', 'cells', 'cell count', 'viability', 'brett', '4ep', '4eg', 'geosmin', 'tca', 'total cost', 'total acids', 'total n', 'total nitrogen', 'free n', 'total extract', 'cold stability', 'hue', 'intensity', 'absorbance', 'od', 'optical density', 'fso3'],
     'cue:target': [
       'target', 'targt', 'tgt', 'targets', 'targeting', 'aim', 'aims', 'aiming', 'aim for', 'aiming for',
-      'goal', 'shoot for', 'shooting for', 'go for', 'going for', 'get to', 'get it to', 'bring to',
+      'goal', 'shoot for', 'shooting for', 'go for', 'going for', 'get to', 'get it to', 'to get', 'to end up at', 'to end at', 'to land at', 'to get it to', 'to make it', 'bring to',
       'bring it to', 'up to', 'raise to', 'raise it to', 'bump to', 'bump it to', 'take to', 'take it to',
       'set to', 'adjust to', 'want it at', 'want at', 'want to be at', 'bring up to', 'bring it up to',
       'get it up to', 'up it to', 'hold at', 'hold it at', 'lift to', 'lift it to', 'target of', 'target is',
@@ -91,7 +91,7 @@ export const en: Words = {
       'make an addition of', 'addition of', 'an addition of', 'add of',
     ],
     'cue:addition': ['addition', 'add', 'adds', 'increase', 'rise', 'more', 'extra', 'bump', 'dose', 'addition for', 'addition to'],
-    'cue:need': ['need', 'needs', 'needing', 'want', 'wants', 'require', 'requires', 'should get', 'wanted'],
+    'cue:need': ['need', 'needs', 'needing', 'want', 'wants', 'require', 'requires', 'should get', 'wanted', 'to give'],
     'cue:molecular': [
       'molecular', 'mol', 'molec', 'molecular so2', 'mso2', 'mol so2', 'active', 'active so2', 'moleculr',
       'molecualr', 'molc', 'molecular sulfur', 'moelcular', 'so2 molecular', 'so2 mol',
