@@ -2,6 +2,7 @@ import { phrasesOf } from './spellings.ts';
 import type { Language } from './understood.ts';
 import { ALL_WORDS } from './words/all.ts';
 import { EVERYWHERE } from './words/everywhere.ts';
+import { LISTED_COMMANDS } from './words/listed-commands.ts';
 import type { Tag, Words } from './words/words.ts';
 
 /** In which languages a message is written. */
@@ -74,6 +75,8 @@ const CLEAR_MIXED_TALK = 1.5;
 
 const WORD = /\p{L}+/gu;
 
+const LISTED = new RegExp(`^\\s*/(?:${LISTED_COMMANDS.join('|')})\\b`);
+
 const countOf = (mask: number): number => {
   let n = 0;
   for (let rest = mask; rest > 0; rest &= rest - 1) n++;
@@ -91,6 +94,8 @@ const countOf = (mask: number): number => {
  * ```
  */
 export function tellLanguages(text: string, chat: Language): ToldLanguages {
+  // Its words are English, and nobody has chosen them.
+  if (LISTED.test(text)) return { first: 'en', others: [], isTold: true, isClear: false };
   const words = text.replaceAll(namesOfGrapes(), ' ').match(WORD) ?? [];
   const masks = words.flatMap((word) => (word.length > 1 ? (knownWords().get(word) ?? []) : []));
   const scoreOf = (n: number, shift: number): number => {

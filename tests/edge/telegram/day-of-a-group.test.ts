@@ -151,5 +151,7 @@ test('what is typed behind its name is answered with a dose to insert, or with n
     results: [{ type: 'article', input_message_content: { message_text: expect.stringContaining('117 g') } }],
   });
   expect(of('2')).toMatchObject({ results: [] });
-  expect(api.callsOf('setMyCommands')).toHaveLength(1);
+  const listed = () => api.callsOf('setMyCommands').map((call) => call['language_code']);
+  await api.until(() => listed().length === 6);
+  expect(listed()).toEqual([undefined, 'es', 'pt', 'fr', 'it', 'de']);
 });
