@@ -17,7 +17,12 @@ function isInWater(board: Board): boolean {
       isCue(board, i, 'water') &&
       board.terms
         .slice(Math.max(0, i - 4), i)
-        .some((term, k, before) => isCue(board, i - before.length + k, 'in') || term.kind === 'number'),
+        .some(
+          (term, k, before) =>
+            isCue(board, i - before.length + k, 'in') ||
+            isCue(board, i - before.length + k, 'per') ||
+            term.kind === 'number',
+        ),
   );
 }
 

@@ -47,6 +47,12 @@ function isClear(board: Board, i: number, { aim, label }: { aim: Aim; label?: Ai
   return (isTerse || isCellarTalk(board)) && !isOtherVerb(board, i);
 }
 
+/** `target 35 mit`: a word that only says target is passed over beside no reading. */
+const isOnlyTarget = (board: Board, i: number): boolean =>
+  isCue(board, i, 'target') &&
+  termAt(board, i).tags.length === 1 &&
+  board.lexicon.language !== board.settings.language;
+
 /** `chill to 30`, `TA up 1.5`, `drop pH to 3.5`: the figure belongs to what stands before the verb. */
 function isOtherVerb(board: Board, i: number): boolean {
   const to = isCue(board, i, 'to') && !isCue(board, i, 'target');
@@ -65,12 +71,13 @@ const declines = (board: Board, i: number): boolean =>
   isCue(board, i - 1, 'not') ||
   (isCue(board, i - 2, 'not') && (isCue(board, i - 1, 'to') || isCue(board, i - 1, 'verb')));
 
-/** `subir el depósito 14 a 34`: a verb of raising before it, with nothing but the vessel or a label between. */
+/** `subir el depósito 14 a 34`, `porta T9 a 28`: a verb of raising before it, with nothing but the vessel or a label between. */
 function isRaised(board: Board, i: number): boolean {
+  const isLifting = (at: number): boolean => isCue(board, at, 'raise') || isCue(board, at, 'bring');
   let k = i - 1;
   while (
     k >= 0 &&
-    !isCue(board, k, 'raise') &&
+    !isLifting(k) &&
     (board.taken[k] === true ||
       // `amener la cuve 7 (49 hl, libre 16) à 30`
       (isMark(board, i - 1, ')') && ['(', ')', ','].some((mark) => isMark(board, k, mark))) ||
@@ -81,7 +88,7 @@ function isRaised(board: Board, i: number): boolean {
       (isCue(board, k, 'of') && k > 0))
   )
     k--;
-  return isCue(board, k, 'raise') && !isCue(board, k - 1, 'not');
+  return isLifting(k) && !isCue(board, k - 1, 'not');
 }
 
 /** `2000 l a pH 3,55`, `à 18 de libre`: a word that says "at" as well as "to"; of a level nobody can tell which. */
@@ -113,12 +120,15 @@ function findVerb(board: Board, i: number): void {
   if (declines(board, i)) return refuse(board, 'ambiguous-number', i - 1, aim.to);
   if (hasTag(board, i - 1, 'label:ph')) return refuse(board, 'ambiguous-number', i - 1, aim.to);
   if (!isClear(board, i, found)) {
-    const asks = isCue(board, i, 'to') && isCellarTalk(board);
+    const asks = (isCue(board, i, 'to') || isOnlyTarget(board, i)) && isCellarTalk(board);
     if (asks) return refuse(board, 'ambiguous-number', i - 1, aim.to);
     return setAside(board, i, isStranger(board, aim.to + 1) ? aim.to + 1 : aim.to);
   }
   const glued = isArrow(board, i) && !termAt(board, i).gap && !termAt(board, i + 1).gap;
   if (glued && hasTag(board, i - 1, 'label:free')) return refuse(board, 'ambiguous-number', i - 1, aim.to);
+  // `to get 20 more ppm`: an addition in the place of a level.
+  if (isCue(board, i, 'target') && isCue(board, aim.to + 1, 'addition') && isCue(board, aim.to + 1, 'extra'))
+    return refuse(board, 'ambiguous-number', i, aim.to + 1);
   if (isArrow(board, i) || isCue(board, i, 'target')) return keepTarget(board, aim, i, label);
   if (isCue(board, i, 'need')) return findNeed(board, i, found);
   // `raise free to 30` says where it should go, `raise free 30` by how much.

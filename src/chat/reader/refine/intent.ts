@@ -41,6 +41,7 @@ function isSolution(board: Board): boolean {
   const dissolved =
     findingOf(board, 'additive')?.value.endsWith('-solution') === true || any(board, 'strength_percent');
   const inWater = holdsCue(board, 'water');
+  if (inWater && any(board, 'rate_mg_L')) return true;
   return dissolved
     ? !hasAmount(board) || inWater
     : inWater && (hasAmount(board) || hasAdditive(board)) && hasVolume(board);
@@ -102,11 +103,14 @@ function isEffect(board: Board): boolean {
   return !isBareMass;
 }
 
+/** `combien`, and not `combien de temps`, which only holds it. */
+const asksHowMuch = (board: Board): boolean => board.terms.some((_, i) => isCue(board, i, 'how-much'));
+
 /** A question for an amount that names an additive or a vessel alone. */
 function asksForDose(board: Board): boolean {
   if (holdsCue(board, 'in-store')) return false;
   if (holdsCue(board, 'how-much'))
-    return hasAdditive(board) || (hasVessel(board) && board.terms.length <= 12);
+    return hasAdditive(board) || (hasVessel(board) && board.terms.length <= 12 && asksHowMuch(board));
   const asked =
     isMark(board, board.terms.length - 1, '?') ||
     board.terms.some((_, i) => isCue(board, i, 'into') && board.taken[i + 1] === true);
@@ -166,12 +170,23 @@ const isTrade = (board: Board): boolean =>
   !hasVessel(board) &&
   !any(board, 'ph', 'free_mg_L');
 
+/** `did we add the 80 g to T4?`, `who added 80 g to T4`: what was done is asked, and nothing is to be reckoned. */
+function asksWhatWasDone(board: Board): boolean {
+  const first = board.terms.findIndex(({ kind }) => kind === 'word');
+  return (
+    isCue(board, first, 'asks-past') &&
+    board.terms.some((_, i) => isCue(board, i, 'add') || isCue(board, i, 'past')) &&
+    !holdsCue(board, 'how-much') &&
+    !any(board, 'ph', 'free_mg_L', 'total_mg_L')
+  );
+}
+
 /** What a message wants. With nothing that is ours it is chat. */
 export function decideIntent(board: Board): Intent {
   if (isSolution(board)) return 'solution';
   if (isAdded(board)) return 'added';
   if (isNegated(board) && !any(board, 'ph', 'free_mg_L') && !aimsAtLevel(board)) return 'chat';
-  if (isTrade(board)) return 'chat';
+  if (isTrade(board) || asksWhatWasDone(board)) return 'chat';
   if (hasAmount(board) && isIdleMass(board)) return 'chat';
   if (isReading(board)) return 'reading';
   if (isEffect(board)) return 'effect';

@@ -61,13 +61,27 @@ const mayGoIn = (board: Board, i: number): boolean => {
 const isOfAdditive = (board: Board, i: number): boolean =>
   isCue(board, i + 1, 'of') && board.terms[i + 2]?.tags.some((tag) => tag.startsWith('additive:')) === true;
 
+/** `again 20 ppm`, `20 ppm to the must`, `20 mg/l braucht T4`: what is to go in, or what is there? Nobody can tell. */
+function mayBeOrder(board: Board, i: number): boolean {
+  if (isCue(board, i - 1, 'again')) return true;
+  const unit = concentrationAt(board, i + 1);
+  if (unit === undefined) return false;
+  const next = board.terms[unit.to + 1]?.tags.includes('label:so2') === true ? unit.to + 2 : unit.to + 1;
+  if (isCue(board, next, 'again') || (isCue(board, next, 'need') && !isFree(board, next + 1))) return true;
+  const must = board.findings.find(({ field, value }) => field === 'stage' && value === 'must');
+  const leads = isCue(board, next, 'into') || isCue(board, next, 'to');
+  return leads && must !== undefined && must.to >= next && must.to <= next + 2;
+}
+
 /** An article alone names no tank: `the 4`. */
 const isAfterArticle = (board: Board, i: number): boolean =>
   isCue(board, i - 1, 'article') || isMark(board, i - 1, '#');
 
-/** `at 3.30` may be the clock. */
-const isTimeLike = (board: Board, i: number): boolean =>
-  /^\d\.[0-5]\d$/.test(termAt(board, i).text) && isCue(board, i - 1, 'clock-before');
+/** `at 3.30`, `meeting 3.30` may be the clock. */
+const isTimeLike = (board: Board, i: number, isOnly: boolean): boolean =>
+  /^\d\.[0-5]\d$/.test(termAt(board, i).text) &&
+  (isCue(board, i - 1, 'clock-before') ||
+    (isOnly && isStranger(board, i - 1) && /^\p{Ll}/u.test(placeOf(board, i - 1, i - 1).text)));
 
 function findPh(board: Board, candidates: readonly number[]): void {
   const likely = candidates.filter((i) => isPhLike(board, i) && concentrationAt(board, i + 1) === undefined);
@@ -79,7 +93,7 @@ function findPh(board: Board, candidates: readonly number[]): void {
   }
   const [i] = likely as [number];
   if (
-    isTimeLike(board, i) &&
+    isTimeLike(board, i, candidates.length === 1) &&
     board.findings.every(({ field }) => field === 'vessel' || field === 'stage' || field === 'style')
   )
     return setAside(board, i, i);
@@ -113,7 +127,7 @@ function findFree(board: Board, candidates: readonly number[]): void {
   const fine =
     !speaksOfAdding(board) &&
     !isOfUnknown(board, only) && !((unit !== undefined || !board.lexicon.isTold) && holdsUnknownVerb(board)) &&
-    only !== undefined && figure !== undefined && !isOfAdditive(board, only) && !isTaken && rangeEnd(board, only) === undefined && !isAfterInto(board, only) && !isAfterArticle(board, only) && !mayGoIn(board, only) &&
+    only !== undefined && figure !== undefined && !isOfAdditive(board, only) && !isTaken && rangeEnd(board, only) === undefined && !isAfterInto(board, only) && !isAfterArticle(board, only) && !mayGoIn(board, only) && !mayBeOrder(board, only) &&
     vintage === undefined && !isMark(board, only + 1, '/') && !isMark(board, only - 1, '/') && figure.value <= MOST_UNLABELLED_FREE_mg_L && (isWhole(board, only) || unit !== undefined) && unit?.id !== 'g/L'; // prettier-ignore
   if (fine && figure.value < 0) return refuse(board, 'negative-value', figure.from, only);
   if (fine) {
@@ -202,10 +216,22 @@ function otherMatterBefore(board: Board, i: number): number | undefined {
     : undefined;
 }
 
+/** `temperature of the cellar 14`: the label of something else, with one word of whose it is between. */
+function otherLabelBefore(board: Board, i: number): number | undefined {
+  let k = i - 1;
+  for (let words = 0; words < 4 && board.taken[k] !== true && termAt(board, k).kind === 'word'; words++, k--)
+    if (termAt(board, k).tags.some((tag) => tag === 'label:temperature' || tag === 'label:aside')) return k;
+  return undefined;
+}
+
 /** The word before a figure that makes it none of the wine's, if one does. */
 function matterBefore(board: Board, i: number, labelled: boolean): number | undefined {
   if (isGluedToWord(board, i)) return i - 1;
-  return (labelled ? strangerBefore(board, i) : undefined) ?? otherMatterBefore(board, i);
+  return (
+    otherLabelBefore(board, i) ??
+    (labelled ? strangerBefore(board, i) : undefined) ??
+    otherMatterBefore(board, i)
+  );
 }
 
 /** Who labels one figure labels the others: then a bare one beside an unknown word is that word's (`hose 18`, `18 pumpovers`). */

@@ -91,7 +91,7 @@ export const en: Words = {
       'make an addition of', 'addition of', 'an addition of', 'add of',
     ],
     'cue:addition': ['addition', 'add', 'adds', 'increase', 'rise', 'more', 'extra', 'bump', 'dose', 'addition for', 'addition to'],
-    'cue:need': ['need', 'needs', 'needing', 'want', 'wants', 'require', 'requires', 'should get', 'wanted', 'to give'],
+    'cue:need': ['need', 'needs', 'needing', 'want', 'wants', 'require', 'requires', 'should get', 'wanted', 'gets', 'receives', 'should receive', 'to give'],
     'cue:molecular': [
       'molecular', 'mol', 'molec', 'molecular so2', 'mso2', 'mol so2', 'active', 'active so2', 'moleculr',
       'molecualr', 'molc', 'molecular sulfur', 'moelcular', 'so2 molecular', 'so2 mol',
@@ -153,6 +153,8 @@ export const en: Words = {
     'cue:if': [
       'if', 'what if', 'would', "i'd", 'suppose', 'supposing', 'say i', 'should i', 'could', 'might',
       'were to', 'shall i', 'assuming', 'in case', 'can i', 'unless', 'had i', 'when i have', 'once', 'when', 'as soon as', 'before we', 'until we', 'after we have'],
+    'cue:decimal': ['point', 'comma'],
+    'cue:again': ['again', 'once again', 'once more'],
     'cue:except': ['without', 'except', 'except for', 'excluding', 'excl', 'but not', 'but without', 'minus', 'apart from', 'other than', 'leaving out', 'not including'],
     'cue:mixed-sample': ['mixed sample', 'mixed samples', 'composite', 'composite sample', 'composites', 'pooled sample', 'blended sample', 'average sample', 'sample mixed', 'bulked sample', 'one mixed sample'],
     'cue:not': [
@@ -192,7 +194,7 @@ export const en: Words = {
     ],
     'cue:holding': [
       'holding solution', 'storage solution', 'holding sol', 'storage sol', 'holding soln', 'storage soln',
-      'wet storage', 'holding mix',
+      'wet storage', 'holding mix', 'barrel storage', 'storing barrels', 'store barrels', 'barrel holding',
     ],
     'cue:cleaning': [
       'soak', 'soaking', 'sanitise', 'sanitize', 'sanitiser', 'sanitizer', 'sanitising', 'sanitizing', 'rinse',
@@ -359,6 +361,7 @@ export const en: Words = {
     'cue:sample-word': ['sample', 'samples', 'aliquot', 'titrated', 'titrant', 'burette', 'pipette', 'pipetted', 'took', 'bottle', 'bottles', 'used', 'ripper', 'drawn', 'vial', 'vials', 'beaker', 'flask'],
     'cue:past-time': ['this morning', 'yesterday', 'last night', 'earlier', 'already', 'earlier today', 'this afternoon', 'an hour ago', 'last week', 'before lunch', 'after lunch', 'ago'],
     'cue:put': ['put'],
+    'cue:asks-past': ['did', 'did we', 'did you', 'did i', 'did he', 'did she', 'did they', 'did anyone', 'has', 'has anyone', 'have you', 'have we', 'who', 'anyone', 'anybody', 'whose'],
     'cue:only-done': ['done'],
     'cue:at-strength': ['at'],
     'cue:bag': ['bag of', 'bags of', 'sack of', 'sacks of', 'box of', 'boxes of', 'pail of', 'drum of', 'bags', 'sacks'],
