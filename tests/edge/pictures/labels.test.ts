@@ -1,4 +1,5 @@
 import { describe, expect, test } from 'vitest';
+import { SPOKEN } from '../../../src/chat/replies/spoken.ts';
 import { LAYOUT } from '../../../src/chat/attachments/chart/layout.ts';
 import { POINTS_PER_UNIT, renderPng } from '../../../src/edge/pictures/render-png.ts';
 import { CASES } from '../../chat/attachments/chart/chart-cases.ts';
@@ -31,8 +32,12 @@ function inkOnEdge({ width, height, colourAt }: Points): string[] {
   return edge.filter(([x, y]) => Math.min(...colourAt(x, y)) < 255).map((place) => place.join());
 }
 
-describe.each(Object.entries(CASES))('%s', (_, one) => {
-  const svg = svgOf(one);
+const DRAWN = SPOKEN.flatMap((language) =>
+  Object.entries(CASES).map(([name, one]) => [name, language, one] as const),
+);
+
+describe.each(DRAWN)('%s in %s', (_, language, one) => {
+  const svg = svgOf(one, language);
   const texts = textsOf(svg);
   const points = pointsOf(renderPng(svg));
 

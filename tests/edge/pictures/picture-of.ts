@@ -4,6 +4,7 @@ import type { ChartData } from '../../../src/chat/attachments/chart/chart-data.t
 import type { ChartManner } from '../../../src/chat/attachments/chart/chart-manner.ts';
 import { chartSvg } from '../../../src/chat/attachments/chart/chart-svg.ts';
 import { chartWords } from '../../../src/chat/attachments/chart/chart-words.ts';
+import type { Language } from '../../../src/chat/reader/understood.ts';
 import { makeSay } from '../../../src/chat/replies/say.ts';
 import { loadLocales } from '../../../src/edge/locales.ts';
 import { fontFiles } from '../../../src/edge/pictures/font-files.ts';
@@ -20,10 +21,11 @@ export function givenOf({ entries, options, manner }: ChartCase): { data: ChartD
   return { data, manner: { ...MANNER, ...manner } };
 }
 
-/** The picture of a case as SVG, with the words of the program. */
-export function svgOf(one: ChartCase): string {
-  const { data, manner } = givenOf(one);
-  const { language } = manner.telling;
+/** The picture of a case as SVG, with the words of the program in its language or another. */
+export function svgOf(one: ChartCase, said?: Language): string {
+  const { data, manner: own } = givenOf(one);
+  const language = said ?? own.telling.language;
+  const manner = { ...own, telling: { ...own.telling, language } };
   return chartSvg(
     data,
     chartWords(data, manner, (line) => say({ language, lines: [line], buttons: [] }).text),
