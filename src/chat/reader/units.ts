@@ -1,6 +1,6 @@
 import { MG_L_IN } from '../../core/units/concentration.ts';
 import type { Board } from './board.ts';
-import { hasTag, isMark } from './board.ts';
+import { hasTag, holdsCue, isMark } from './board.ts';
 import type { UnitId } from './words/words.ts';
 
 /** A unit as it stands in the text: which, and its last term. */
@@ -17,8 +17,17 @@ export const MASS_UNITS: readonly UnitId[] = ['g', 'mg', 'kg', 'lb', 'oz', 'ton'
 /** The unit word at term `i`, among those asked for. */
 export function unitWordAt(board: Board, i: number, among: readonly UnitId[]): UnitId | undefined {
   if (board.terms[i]?.kind !== 'word' || board.taken[i] === true) return undefined;
+  if (isTonne(board, i) && among.includes('ton')) return 'ton';
   return among.find((id) => hasTag(board, i, `unit:${id}`));
 }
+
+/** `vendange 8 t`, `8 t de raisin`: beside fruit the sign of the tonne; anywhere else it may be a tank or the total. */
+const isTonne = (board: Board, i: number): boolean =>
+  board.terms[i]?.text === 't' &&
+  board.terms[i]?.capital === false &&
+  board.terms[i - 1]?.kind === 'number' &&
+  board.terms[i + 1]?.kind !== 'number' &&
+  holdsCue(board, 'fruit');
 
 /** The unit of volume or mass that begins at term `i`; a hyphen may stand before it (`60-gal`). */
 export function unitAt(board: Board, i: number, among: readonly UnitId[]): UnitAt | undefined {

@@ -89,6 +89,14 @@ export function figureAfter(board: Board, i: number): Beside | undefined {
   return isFree(board, k) ? { at: k, to: unitEnd(board, k) } : undefined;
 }
 
+/** `TA tank 3: 6`, `température de la cuve 3 : 14`: the figure behind the vessel that was measured. */
+function figurePastVessel(board: Board, i: number): Beside | undefined {
+  let k = i + 1;
+  while (isCue(board, k, 'of') || isCue(board, k, 'article') || isCue(board, k, 'in')) k++;
+  const vessel = board.findings.find(({ field, from }) => field === 'vessel' && from === k);
+  return vessel && figureAfter(board, vessel.to);
+}
+
 /** The figure before a label, past its unit and "of". */
 export function figureBefore(board: Board, i: number): Beside | undefined {
   let k = i - 1;
@@ -118,6 +126,7 @@ export function figureBeside(board: Board, i: number, label: LabelId): Beside | 
   const behind = figureBefore(board, i);
   const before = behind && suits(board, label, behind.at) ? behind : undefined;
   if (after && before && (!suits(board, label, after.at) || isPastDash(board, i, after))) return before;
+  if (!after && !before) return figurePastVessel(board, i);
   if (!after || hasForeignUnit(board, after.at)) return before ?? after;
   if (!before || hasForeignUnit(board, before.at)) return after;
   const figure = (one: Beside): Figure =>

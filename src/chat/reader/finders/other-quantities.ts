@@ -1,3 +1,4 @@
+import { sizeOfBottles } from './size-of-bottles.ts';
 import type { Board } from '../board.ts';
 import { claim, hasTag, isCue, isFree, isMark, setAside, termAt, isLabelled } from '../board.ts';
 import { isStranger } from '../stranger.ts';
@@ -29,6 +30,8 @@ function countedEnd(board: Board, i: number): number | undefined {
   const next = board.terms[i + 1];
   if (next?.kind !== 'word') return undefined;
   if (next.text === 't' && isMark(board, i + 2, '/')) return i + 3;
+  // `300 bottles of 750 mL` is a volume.
+  if (isCue(board, i + 1, 'bottle-unit') && sizeOfBottles(board, i + 2) !== undefined) return undefined;
   if (isCue(board, i + 1, 'bottle-unit') || isCue(board, i + 1, 'bag')) return i + 1;
   return isCue(board, i + 1, 'in') && next.text === 'in' && isStranger(board, i + 2) ? i + 2 : undefined;
 }

@@ -71,16 +71,21 @@ const declines = (board: Board, i: number): boolean =>
   isCue(board, i - 1, 'not') ||
   (isCue(board, i - 2, 'not') && (isCue(board, i - 1, 'to') || isCue(board, i - 1, 'verb')));
 
+/** `amener la cuve 7 (49 hl, libre 16) à 30`: the term before a bracket that closes at term `i`; else `i`. */
+function beforeBracket(board: Board, i: number): number {
+  let k = i;
+  while (isMark(board, i, ')') && k >= 0 && !isMark(board, k, '(')) k--;
+  return isMark(board, k, '(') ? k - 1 : i;
+}
+
 /** `subir el depósito 14 a 34`, `porta T9 a 28`: a verb of raising before it, with nothing but the vessel or a label between. */
 function isRaised(board: Board, i: number): boolean {
   const isLifting = (at: number): boolean => isCue(board, at, 'raise') || isCue(board, at, 'bring');
-  let k = i - 1;
+  let k = beforeBracket(board, i - 1);
   while (
     k >= 0 &&
     !isLifting(k) &&
     (board.taken[k] === true ||
-      // `amener la cuve 7 (49 hl, libre 16) à 30`
-      (isMark(board, i - 1, ')') && ['(', ')', ','].some((mark) => isMark(board, k, mark))) ||
       isCue(board, k, 'article') ||
       hasTag(board, k, 'label:free') ||
       hasTag(board, k, 'label:so2') ||

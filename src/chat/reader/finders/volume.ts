@@ -13,6 +13,7 @@ import {
   labelBefore,
 } from '../board.ts';
 import { litresOf, noteUnit } from './barrels.ts';
+import { sizeOfBottles } from './size-of-bottles.ts';
 import type { UnitAt } from '../units.ts';
 import { VOLUME_UNITS, unitAt } from '../units.ts';
 
@@ -69,6 +70,13 @@ const isRange = (board: Board, i: number): boolean =>
 const isFlow = (board: Board, i: number): boolean =>
   (isMark(board, i, '/') || isCue(board, i, 'per')) && hasTag(board, i + 1, 'unit:none-of-ours');
 
+/** `300 bottles of 750 mL`: how many, before the size at term `i`. */
+function bottlesBefore(board: Board, i: number): number | undefined {
+  const at = isCue(board, i - 1, 'of') ? i - 3 : i - 2;
+  const isCount = isCue(board, at + 1, 'bottle-unit') && isFree(board, at) && figureAt(board, at).value > 0;
+  return isCount && sizeOfBottles(board, at + 2) === i ? at : undefined;
+}
+
 /** Reads the volume at term `i`, with the sum or the second unit that belongs to it; gives back its last term. */
 function findVolumeAt(board: Board, i: number): number {
   const volume = volumeAt(board, i);
@@ -83,8 +91,14 @@ function findVolumeAt(board: Board, i: number): number {
     refuse(board, 'ambiguous-number', i - 2, volume.unit.to);
     return volume.unit.to;
   }
-  const start = sumStart(board, i);
-  const litres = start < i ? sumOf(board, start, i) * litresOf(board, volume.unit.id) : volume.volume_L;
+  const bottles = bottlesBefore(board, i);
+  const start = bottles ?? sumStart(board, i);
+  const litres =
+    bottles !== undefined
+      ? volume.volume_L * figureAt(board, bottles).value
+      : start < i
+        ? sumOf(board, start, i) * litresOf(board, volume.unit.id)
+        : volume.volume_L;
   const bracket = bracketEnd(board, volume.unit.to + 1);
   if (isFlow(board, volume.unit.to + 1)) {
     setAside(board, i, volume.unit.to + 2);
@@ -98,7 +112,7 @@ function findVolumeAt(board: Board, i: number): number {
   const to = bracket ?? volume.unit.to;
   const before = findingOf(board, 'volume_L');
   find(board, 'volume_L', litres, 'unit', start < i ? start : volume.figure.from, to);
-  if (start < i)
+  if (start < i && bottles === undefined)
     board.notes.push({
       id: 'volume-sum',
       text: board.message.slice(

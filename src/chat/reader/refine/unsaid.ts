@@ -1,12 +1,16 @@
 import type { Board } from '../board.ts';
-import { isCue, placeOf, termAt } from '../board.ts';
+import { isCue, isFound, placeOf, termAt } from '../board.ts';
 import { isStranger } from '../stranger.ts';
 
 /** Words that say that something was or is to be added: then a figure that nothing names is no reading. */
 export const speaksOfAdding = (board: Board): boolean =>
   board.lexicon.language !== 'en' &&
-  board.terms.some((_, i) =>
-    (['past', 'past-if-accented', 'add', 'add-behind', 'raise'] as const).some((cue) => isCue(board, i, cue)),
+  board.terms.some(
+    (_, i) =>
+      (['past', 'past-if-accented', 'add', 'add-behind', 'raise'] as const).some((cue) =>
+        isCue(board, i, cue),
+      ) ||
+      (isCue(board, i, 'target') && !isFound(board, 'target')),
   );
 
 /** A word in small letters that no list knows: in a language that is not read in full it may be the verb. */
