@@ -11,9 +11,9 @@ export async function runPicture(
   message: IncomingMessage,
   { store, say }: { readonly store: Pick<CellarStore, 'look'>; readonly say: Say },
 ): Promise<Brought> {
-  const { vessel, targets, basis, zone, language, decimalMark: mark, unit } = errand;
+  const { vessel, targets, basis, limit_mg_L, zone, language, decimalMark: mark, unit } = errand;
   const entries = await store.look(message.cellar, (view) => view.entries({ vessel }));
-  const data = chartOf(entries, { vessel, targets, basis });
+  const data = chartOf(entries, { vessel, targets, basis, ...(limit_mg_L !== undefined && { limit_mg_L }) });
   const manner = { telling: { zone, language, now: message.at }, mark, unit };
   const said = [say({ language, lines: pictureLines(data, { vessel, manner }), buttons: [] })];
   if (data === undefined) return { said };

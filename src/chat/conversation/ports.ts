@@ -121,6 +121,8 @@ export type Errand =
       /** What the free SO2 that a pH asks for is reckoned by. */
       readonly targets: Settings['targets'];
       readonly basis: Settings['basis'];
+      /** The limit of total SO2 of its market, in mg/L, where one holds. */
+      readonly limit_mg_L?: number;
       readonly unit: 'mg/L' | 'ppm';
       readonly zone: string;
       readonly language: Language;

@@ -1,3 +1,7 @@
+import type { WineTraits } from '../../../../core/cellar/entry.ts';
+import type { Vessel } from '../../../../core/cellar/vessel.ts';
+import { limitsFor } from '../../../../core/limits/limits-for.ts';
+import type { Region } from '../../../../core/limits/region.ts';
 import { vesselName } from '../../../replies/vessel-name.ts';
 import type { Here } from '../../here.ts';
 import { line } from '../../lines/line.ts';
@@ -5,13 +9,23 @@ import type { Handled } from '../../ports.ts';
 import { replying } from '../../replying.ts';
 import { zoneOf } from '../../zone.ts';
 
-/** A picture of a vessel's free SO2: it is made at the edge. */
+/** The limit of total SO2 that a wine is held against, in mg/L; only one whose text was read is drawn as a line. */
+function limitOfTotal(vessel: Vessel | undefined, region: Region): number | undefined {
+  const traits: WineTraits = Object.fromEntries(
+    Object.entries(vessel?.traits ?? {}).map(([trait, { value }]) => [trait, value]),
+  );
+  const { total } = limitsFor({ ...traits, region, organic: traits.organic ?? false });
+  return total?.confidence === 'read' ? total.limit_mg_L : undefined;
+}
+
+/** A picture of a vessel's SO2: it is made at the edge. */
 export function drawPicture(vessel: string | undefined, here: Here): Handled {
   if (vessel === undefined || !here.vessels.has(vessel)) {
     const values = { vessel: vessel === undefined ? 'none' : vesselName(vessel) };
     return replying(here, { lines: [line('first', 'picture-none', values)] });
   }
   const { settings, memory } = here;
+  const limit_mg_L = limitOfTotal(here.vessels.get(vessel), settings.region);
   return {
     ...replying(here, { lines: [] }),
     replies: [],
@@ -20,6 +34,7 @@ export function drawPicture(vessel: string | undefined, here: Here): Handled {
       vessel,
       targets: settings.targets,
       basis: settings.basis,
+      ...(limit_mg_L !== undefined && { limit_mg_L }),
       unit: memory.concentrationUnit === 'ppm' ? 'ppm' : 'mg/L',
       zone: zoneOf(settings),
       language: settings.language,
