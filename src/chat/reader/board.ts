@@ -2,7 +2,7 @@ import type { Problem, ProblemCode } from '../../core/problem.ts';
 import type { FoldedText } from './fold-text.ts';
 import type { Grouping } from './numbers.ts';
 import { readDecimal, readNumeral } from './numbers.ts';
-import { concentrationLength } from './join-numbers.ts';
+import { concentrationLength, looksLikePh } from './join-numbers.ts';
 import type { Lexicon } from './lexicon.ts';
 import type { Piece } from './own-pieces.ts';
 import type { SaidWhen } from './command.ts';
@@ -183,6 +183,8 @@ export const claimsNext = (board: Board, i: number): boolean =>
 function hasOwnFigure(board: Board, k: number): boolean {
   const at = k - 1 - concentrationLength(board.terms, k - 1);
   if (board.terms[at]?.kind !== 'number' || board.taken[at] === true) return false;
+  const isOfSO2 = hasTag(board, k, 'label:free') || hasTag(board, k, 'label:total');
+  if (at === k - 1 && isOfSO2 && looksLikePh(termAt(board, at).text)) return false;
   return !claimsNext(board, at - 1) && labelBefore(board, at) === undefined;
 }
 

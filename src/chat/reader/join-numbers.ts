@@ -59,6 +59,22 @@ function joinFractions(terms: readonly Term[]): Term[] {
   return out;
 }
 
+/** `3 comma 4`, `3point45`: the mark in words. Behind a vessel's number nobody can tell, and it stays apart. */
+function joinSpokenDecimals(terms: readonly Term[]): Term[] {
+  const out: Term[] = [];
+  for (let i = 0; i < terms.length; i++) {
+    const [a, mark, b] = [termIn(terms, i), termIn(terms, i + 1), termIn(terms, i + 2)];
+    const isOfVessel = has(out.at(-1), /^vessel:/) || (!a.gap && !has(out.at(-1), /^label:/));
+    const joins =
+      isWhole(a) && a.text.length <= 3 && has(mark, /^cue:decimal$/) && isWhole(b) && b.text.length <= 2;
+    if (joins && !(isOfVessel && out.at(-1)?.kind === 'word')) {
+      out.push({ ...a, text: `${a.text}.${b.text}`, end: b.end });
+      i += 2;
+    } else out.push(a);
+  }
+  return out;
+}
+
 const CLAIMS_NEXT = /^(label:(?!volume)|vessel:|cue:(target|to|add|raise|lot|molecular|from|by|need|at)$)/;
 
 /** How many terms a concentration takes that ends at term `i`: `ppm` one, `g/L` three. */
@@ -68,11 +84,17 @@ export function concentrationLength(terms: readonly Term[], i: number): number {
   return has(terms[i], /^unit:(L|hL)$/) && per && has(terms[i - 2], /^unit:(g|mg)$/) ? 3 : 0;
 }
 
+/** A numeral that is written as a pH is. */
+export const looksLikePh = (text: string): boolean => /^(2[.,'][7-9]|3[.,']\d|4[.,'][0-5])\d?$/.test(text);
+
 /** `3.52 pH 1 250 L`: a label behind its figure claims no second one. */
 function hasOwnFigure(terms: readonly Term[], k: number): boolean {
   if (!has(terms[k], /^(label:|cue:molecular$)/)) return false;
   const at = k - 1 - concentrationLength(terms, k - 1);
   if (terms[at]?.kind !== 'number') return false;
+  // `3.5 free 20 800 gal`: the first is the pH, and the label's own stands behind it.
+  if (at === k - 1 && has(terms[k], /^label:(free|total)$/) && looksLikePh(termIn(terms, at).text))
+    return false;
   // `T8 alc 13.5`: the vessel's number is no figure.
   const glued =
     termIn(terms, at).gap === false && terms[at - 1]?.kind === 'word' && !has(terms[at - 1], /^label:/);
@@ -82,9 +104,18 @@ function hasOwnFigure(terms: readonly Term[], k: number): boolean {
 /** Marks that claim the figure behind them: `-> 35 950 gal`, `+25 900 gal`, `@ 18 900 gal`. */
 const CLAIMING_MARKS = new Set(['->', '=>', '→', '+', '@', '<', '>', '≈']);
 
+/** `L 17 T 58 180 hl`: side by side the letters are labels, as the letter pair reads them. */
+function isSecondLetter(terms: readonly Term[], i: number): boolean {
+  const first = terms[i - 1]?.text === ',' || terms[i - 1]?.text === '/' ? i - 3 : i - 2;
+  const isPair = termIn(terms, i).text === 't' && terms[first + 1]?.kind === 'number';
+  return isPair && terms[first]?.kind === 'word' && /^[fl]$/.test(termIn(terms, first).text);
+}
+
 /** Whether the number after term `i` is claimed by a label or vessel word before it. */
 function isClaimedBefore(terms: readonly Term[], i: number): boolean {
-  if (CLAIMING_MARKS.has(termIn(terms, i).text)) return true;
+  if (CLAIMING_MARKS.has(termIn(terms, i).text) || isSecondLetter(terms, i)) return true;
+  // `#3 900 gal`
+  if (termIn(terms, i).text === '#' && terms[i + 1]?.gap === false) return true;
   let k = i;
   while (
     k >= 0 &&
@@ -204,7 +235,7 @@ export function joinNumbers(terms: readonly Term[]): Term[] {
   const out: Term[] = [];
   let line: Term[] = [];
   // Line by line: what the next tank's line holds says nothing of this one's figures.
-  for (const term of joinFractions(terms)) {
+  for (const term of joinFractions(joinSpokenDecimals(terms))) {
     if (term.kind !== 'break') line.push(term);
     else {
       out.push(...joinBlankGroups(line), term);

@@ -7,6 +7,7 @@ import { readDraft } from './read-draft.ts';
 import type { Term } from './split-terms.ts';
 import { termIn } from './split-terms.ts';
 import { withHeading, type Heading } from './with-heading.ts';
+import { withSections } from './with-sections.ts';
 import type { Draft, Fields, Reading, ReaderSettings } from './understood.ts';
 
 /** A line read on its own. */
@@ -147,6 +148,10 @@ function withShared(draft: Draft, shared: Draft | undefined): Draft {
 const isSum = ({ terms, hasVolume }: LineRead): boolean =>
   hasVolume && termIn(terms, 0).tags.includes('label:total');
 
+/** `red` below a tank: one word that is a fact of it. */
+const isBareFact = ({ terms, draft }: LineRead): boolean =>
+  terms.length === 1 && Object.keys(draft.fields).length > 0;
+
 /** The lines of each reading: one that opens it and those below; a line that nobody can read is one of its own. */
 function groupsOf(lines: readonly LineRead[], opens: (line: LineRead) => boolean): LineRead[][] {
   const groups: LineRead[][] = [];
@@ -154,7 +159,8 @@ function groupsOf(lines: readonly LineRead[], opens: (line: LineRead) => boolean
     const last = groups.at(-1);
     if (opens(line)) groups.push([line]);
     else if (isSum(line)) continue;
-    else if (i > 0 && line.draft.intent !== 'chat' && last && !last[0]?.leftover) last.push(line);
+    else if (i > 0 && (line.draft.intent !== 'chat' || isBareFact(line)) && last && !last[0]?.leftover)
+      last.push(line);
     else if (i > 0 && line.leftover) groups.push([line]);
   }
   return groups;
@@ -197,7 +203,8 @@ export function readRound(
   setBoard: SetBoard,
   settings: ReaderSettings,
 ): Round | undefined {
-  const read = lines.map((terms) => readLine(terms, setBoard));
+  const below = withSections(lines, (terms) => readLine(terms, setBoard).draft);
+  const read = below.map((terms) => readLine(terms, setBoard));
   if (!isRound(read)) return undefined;
   const byVessel = read.filter(({ vessel }) => vessel !== undefined).length >= 2;
   const isOpen = ({ vessel, hasVolume }: LineRead): boolean => (byVessel ? vessel !== undefined : hasVolume);

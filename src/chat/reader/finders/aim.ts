@@ -104,7 +104,8 @@ function otherMatter(board: Board, aim: Aim): number | undefined {
   const named =
     hasTag(board, next, 'additive:none') || (hasTag(board, next, 'label:aside') && !isFree(board, next + 1));
   const unknown = unit !== undefined && next === aim.to + 1 && isStranger(board, next);
-  return named || (unknown && termAt(board, next).text.length > 2) || unit?.id === 'g/L'
+  const isUnusual = unit?.id === 'g/L' && !hasTag(board, aim.to, 'label:so2');
+  return named || (unknown && termAt(board, next).text.length > 2) || isUnusual
     ? Math.min(next, board.terms.length - 1)
     : undefined;
 }

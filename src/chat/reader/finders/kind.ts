@@ -1,11 +1,19 @@
 import type { Category, Product, Style } from '../../../core/wine.ts';
 import type { Board } from '../board.ts';
 import { find, hasTag, isCue, termAt, isMark } from '../board.ts';
+import { isPhLike } from '../ph-like.ts';
 import { isStranger } from '../stranger.ts';
 
 const STYLES: readonly Style[] = ['red', 'white', 'rosé'];
 const CATEGORIES: readonly Category[] = ['sweet', 'sparkling', 'fortified'];
 const PRODUCTS: readonly Product[] = ['cider', 'mead', 'fruit-wine', 'alcohol-free'];
+
+/** `tawny port 500 L`: right before a figure, among a pH or SO2, a category is one, whoever knows the word beside it. */
+const opensFigures = (board: Board, i: number): boolean =>
+  board.terms[i + 1]?.kind === 'number' &&
+  (board.cues.has('label:ph') ||
+    board.cues.has('label:free') ||
+    board.terms.some((_, k) => isPhLike(board, k)));
 
 /** `rose to 3.6` is a verb, `sample port` a tap. */
 function isOtherwise(board: Board, i: number): boolean {
@@ -13,7 +21,9 @@ function isOtherwise(board: Board, i: number): boolean {
     return isCue(board, i + 1, 'to') || isCue(board, i + 1, 'by') || isCue(board, i + 1, 'from');
   return (
     isCue(board, i, 'tap-too') &&
-    (isCue(board, i - 1, 'lot') || isCue(board, i - 1, 'vessel-statement') || isCue(board, i - 1, 'article'))
+    (isCue(board, i - 1, 'lot') ||
+      isCue(board, i - 1, 'vessel-statement') ||
+      (isCue(board, i - 1, 'article') && !opensFigures(board, i)))
   );
 }
 
@@ -33,7 +43,8 @@ export function findKind(board: Board): void {
     if (isCue(board, i - 1, 'not')) continue;
     if (style && isStranger(board, i + 1)) continue;
     if (product && isStranger(board, i + 1)) continue;
-    if (category && (isStranger(board, i - 1) || isStranger(board, i + 1) || isThanks(board, i))) continue;
+    const isBesideStranger = isStranger(board, i - 1) || isStranger(board, i + 1);
+    if (category && ((isBesideStranger && !opensFigures(board, i)) || isThanks(board, i))) continue;
     if (style) find(board, 'style', style, 'labelled', i, i);
     else if (category) {
       find(board, 'category', category, 'labelled', i, i);

@@ -1,5 +1,17 @@
 import type { Board } from '../board.ts';
-import { findingOf, hasTag, holdsCue, isCue, isFound, placeOf, refuse, termAt, setAside } from '../board.ts';
+import { isPhLike } from '../ph-like.ts';
+import {
+  findingOf,
+  hasTag,
+  holdsCue,
+  isCue,
+  isFound,
+  isFree,
+  placeOf,
+  refuse,
+  termAt,
+  setAside,
+} from '../board.ts';
 
 const CHEMICAL_SLIP = /^(meta)?(bi)?sul(f|ph)(at|id)es?$|(meta|di|pyro)sul(f|ph)(at|id)$/;
 
@@ -23,7 +35,7 @@ function refuseWord(board: Board, i: number): void {
 
 const isSulfateWord = (board: Board, i: number): boolean =>
   board.terms[i]?.kind === 'word' &&
-  board.terms[i].tags.length === 0 &&
+  board.terms[i].tags.every((tag) => tag === 'label:aside') &&
   CHEMICAL_SLIP.test(board.terms[i].text);
 
 const isStrangerIn = (board: Board, i: number): boolean =>
@@ -91,7 +103,10 @@ export function findOtherAdditive(board: Board): void {
   if (named) return nameOnly(board, anywhere);
   const isWick = isCue(board, anywhere, 'wick') && isFound(board, 'vessel');
   const slip = CHEMICAL_SLIP.test(termAt(board, anywhere).text.split(' ').at(-1) ?? '');
-  const isFigure = isFound(board, 'ph') || isFound(board, 'free_mg_L');
+  const isFigure =
+    isFound(board, 'ph') ||
+    isFound(board, 'free_mg_L') ||
+    board.terms.some((_, i) => isFree(board, i) && isPhLike(board, i));
   if (isWick || (isFigure && (slip || isOffered(board, anywhere)))) return refuseWord(board, anywhere);
   const wanted =
     board.terms[anywhere - 1]?.kind === 'number' ||

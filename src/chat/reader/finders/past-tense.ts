@@ -70,6 +70,10 @@ export function isToldAsFact(board: Board, i: number): boolean {
   );
 }
 
+/** `T4 got 120 g`: behind a vessel's number. */
+const isGot = (board: Board, i: number): boolean =>
+  isCue(board, i, 'got') && board.terms[i - 1]?.kind === 'number';
+
 /** Finds that something was added: a past-tense verb that is neither negated, conditional, asked nor still to come. */
 export function findPastTense(board: Board): void {
   if (board.marks.pastLine) board.pastTense = true;
@@ -78,7 +82,7 @@ export function findPastTense(board: Board): void {
   const said = board.terms.findIndex(
     (_, i) =>
       board.taken[i] !== true &&
-      (isPast(board, i) || (isCue(board, i, 'put') && holdsCue(board, 'past-time'))),
+      (isPast(board, i) || ((isCue(board, i, 'put') || isGot(board, i)) && holdsCue(board, 'past-time'))),
   );
   if (said < 0 && !declined && !board.pastTense) findUnclearVerb(board);
   if (said < 0 || declined) return;

@@ -75,7 +75,7 @@ export const en: Words = {
       'target', 'targt', 'tgt', 'targets', 'targeting', 'aim', 'aims', 'aiming', 'aim for', 'aiming for',
       'goal', 'shoot for', 'shooting for', 'go for', 'going for', 'get to', 'get it to', 'to get', 'to end up at', 'to end at', 'to land at', 'to get it to', 'to make it', 'bring to',
       'bring it to', 'up to', 'raise to', 'raise it to', 'bump to', 'bump it to', 'take to', 'take it to',
-      'set to', 'adjust to', 'want it at', 'want at', 'want to be at', 'bring up to', 'bring it up to',
+      'set to', 'adjust to', 'needs to be at', 'need to be at', 'has to be at', 'must be at', 'should be at', 'should sit at', 'want it at', 'want at', 'want to be at', 'bring up to', 'bring it up to',
       'get it up to', 'up it to', 'hold at', 'hold it at', 'lift to', 'lift it to', 'target of', 'target is',
       'aim at', 'correct to', 'top up to', 'dose to', 'increase to', 'set at', 'desired', 'ideal', 'optimal', 'ideally', 'hit', 'to hit', 'reach', 'to reach', 'get up to', ],
     'cue:to': ['to'],
@@ -86,6 +86,7 @@ export const en: Words = {
       'bump up', 'bump up by', 'raise free by', 'raise free so2 by', 'bump free by', 'up free by', 'increase',
       'lift', 'another', 'top up by', 'top up',
     ],
+    'cue:bring': ['bring', 'put', 'take'],
     'cue:add': [
       'add', 'addd', 'adding', 'ad', 'dose', 'dosing', 'to add', 'put in', 'give it', 'hit it with',
       'make an addition of', 'addition of', 'an addition of', 'add of',
@@ -186,7 +187,7 @@ export const en: Words = {
     'cue:vessel-statement': [
       'racked', 'moved', 'transferred', 'topped', 'pumped over', 'emptied', 'empty', 'cleaned', 'filled',
       'blended', 'filtered', 'punched', 'bottled off', 'forget', 'drained', 'washed', 'sampled', 'topping',
-      'racking', 'pressed', 'is full', 'rack', 'stirred', 'check', 'taste', 'tasted', 'sample',
+      'racking', 'pressed', 'is full', 'rack', 'stirred', 'cleaning', 'needs cleaning', 'needs a clean', 'check', 'taste', 'tasted', 'sample',
     ],
     'cue:water': [
       'water', 'h2o', 'hot water', 'warm water', 'cold water', 'of water', 'distilled water', 'tap water',
@@ -361,6 +362,7 @@ export const en: Words = {
     'cue:sample-word': ['sample', 'samples', 'aliquot', 'titrated', 'titrant', 'burette', 'pipette', 'pipetted', 'took', 'bottle', 'bottles', 'used', 'ripper', 'drawn', 'vial', 'vials', 'beaker', 'flask'],
     'cue:past-time': ['this morning', 'yesterday', 'last night', 'earlier', 'already', 'earlier today', 'this afternoon', 'an hour ago', 'last week', 'before lunch', 'after lunch', 'ago'],
     'cue:put': ['put'],
+    'cue:got': ['got', 'received'],
     'cue:asks-past': ['did', 'did we', 'did you', 'did i', 'did he', 'did she', 'did they', 'did anyone', 'has', 'has anyone', 'have you', 'have we', 'who', 'anyone', 'anybody', 'whose'],
     'cue:only-done': ['done'],
     'cue:at-strength': ['at'],
@@ -453,7 +455,7 @@ export const en: Words = {
       'semi sparkling', 'spumante', 'cremant',
     ],
     'category:fortified': [
-      'fortified', 'port', 'liqueur wine', 'liqueur', 'sherry', 'madeira', 'fortified wine', 'port wine',
+      'fortified', 'port', 'ruby port', 'tawny port', 'vintage port', 'white port', 'liqueur wine', 'liqueur', 'sherry', 'madeira', 'fortified wine', 'port wine',
       'liquer wine', 'vin doux', 'vermouth', 'fortifed',
     ],
     'product:cider': ['cider', 'ciders', 'hard cider', 'cyder'],

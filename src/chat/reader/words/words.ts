@@ -29,7 +29,7 @@ export type CueId =
   | 'fruit' | 'wine' | 'verb' | 'pronoun' | 'month' | 'lot' | 'variety'
   | 'greeting' | 'thanks' | 'help' | 'cellar' | 'plain' | 'potassium' | 'sodium' | 'yet'
   | 'percent' | 'please' | 'in-store' | 'into' | 'clock-before' | 'no' | 'states' | 'plus' | 'times' | 'wick'
-  | 'decimal' | 'again' | 'except' | 'mixed-sample' | 'should' | 'fullness' | 'share-word' | 'limit' | 'sample-word' | 'past-time' | 'asks-past' | 'put' | 'lately' | 'bag' | 'buy' | 'in-water-name' | 'solution-name' | 'per-barrel' | 'oxygen' | 'yield' | 'fruit-sound' | 'fruit-damaged' | 'fruit-rot' | 'rises-too' | 'tap-too' | 'from-too' | 'add-behind' | 'past-if-accented' | 'only-done' | 'is-if-accented' | 'if-if-accented' | 'one-or-many' | 'half-if-accented' | 'bring' | 'also-at' | 'at-strength' | 'one' | 'many'
+  | 'decimal' | 'again' | 'except' | 'mixed-sample' | 'should' | 'fullness' | 'share-word' | 'limit' | 'sample-word' | 'past-time' | 'asks-past' | 'got' | 'put' | 'lately' | 'bag' | 'buy' | 'in-water-name' | 'solution-name' | 'per-barrel' | 'oxygen' | 'yield' | 'fruit-sound' | 'fruit-damaged' | 'fruit-rot' | 'rises-too' | 'tap-too' | 'from-too' | 'add-behind' | 'past-if-accented' | 'only-done' | 'is-if-accented' | 'if-if-accented' | 'half-if-accented' | 'bring' | 'also-at' | 'at-strength' | 'one' | 'many'
   | 'designated' | 'declared-year' | 'density' | 'density-unit' | 'undeclared-year' | 'quality' | 'other-sparkling' | 'pdo' | 'bulk' | 'keep' | 'bottling' | 'bottling-reserve'; // prettier-ignore
 
 /** What a word is. */
