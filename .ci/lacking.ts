@@ -32,7 +32,7 @@ function conceptsOf({
 /** Concepts that a language may have no word of: it says them by its grammar, or has them in common with all. */
 const MAY_LACK = new Set([
   'says cue:rises-too', 'says cue:tap-too', 'says cue:put', 'says cue:one', 'says cue:many', 'says cue:from-too', 'says cue:also-at', 'says cue:add-behind',
-  'says cue:past-if-accented', 'says cue:is-if-accented', 'says cue:if-if-accented', 'says cue:size', 'own ordinal', 'own ago', 'own ago-before', 'own over', 'danger idiom', 'says stage:malolactic', 'says stage:finished',
+  'says cue:past-if-accented', 'says cue:is-if-accented', 'says cue:if-if-accented', 'says cue:half-if-accented', 'says cue:size', 'own ordinal', 'own ago', 'own ago-before', 'own over', 'danger idiom', 'says stage:malolactic', 'says stage:finished',
 ]); // prettier-ignore
 
 /** What other languages have words for and this one has not. */

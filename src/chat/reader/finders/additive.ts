@@ -156,7 +156,11 @@ function findBareSO2(board: Board, i: number): void {
 
 /** `sulfite powder`, `sulfite stock`: something with SO2 in it whose name nobody has said. */
 function findUnnamed(board: Board, i: number, isSolution: boolean): void {
-  const strength = strengthNear(board, i);
+  const near = strengthNear(board, i);
+  // `sulfites 40% meta`: the strength is of the name behind it.
+  const isOfNext =
+    near !== undefined && near.from > i && KNOWN.some((id) => hasTag(board, near.to + 1, `additive:${id}`));
+  const strength = isOfNext ? undefined : near;
   board.marks.unnamedAdditive = true;
   if (isSolution) board.marks.unnamedSolution = true;
   claim(board, i, i);
@@ -164,6 +168,10 @@ function findUnnamed(board: Board, i: number, isSolution: boolean): void {
     find(board, 'strength_percent', strength.percent, 'labelled', strength.from, strength.to);
   else if (strength) claim(board, strength.from, strength.to);
 }
+
+/** `without kmbs`: what is said not to go in is none of the message's additive, and the usual one is no guess to make. */
+const isDeclined = (board: Board, i: number): boolean =>
+  (['not', 'no', 'except'] as const).some((cue) => isCue(board, i - 1, cue));
 
 /** `10% stock`, apart from any name: the per cent is the strength of a solution, and no wine's alcohol. */
 function findNamelessStock(board: Board): void {
@@ -183,7 +191,10 @@ export function findAdditive(board: Board): void {
   for (let i = 0; i < board.terms.length; i++) {
     if (board.taken[i] === true || termAt(board, i).kind !== 'word') continue;
     const id = KNOWN.find((one) => hasTag(board, i, `additive:${one}`));
-    if (id) findKnown(board, i, id);
+    if (id && isDeclined(board, i)) {
+      claim(board, i, i);
+      board.marks.unnamedAdditive = true;
+    } else if (id) findKnown(board, i, id);
     else if (hasTag(board, i, 'label:so2')) findBareSO2(board, i);
     else if (hasTag(board, i, 'additive:unnamed')) findUnnamed(board, i, isCue(board, i, 'solution-name'));
   }

@@ -28,6 +28,33 @@ const isShare = (board: Board, i: number): boolean =>
   ) ||
   (board.terms[i]?.kind === 'number' && (board.terms[i - 1]?.text === '/' || board.terms[i].text === '½'));
 
+/** `half of 90 g`, `la mitad del depósito`: where the figure or the vessel ends that is halved. */
+function halvedEnd(board: Board, i: number): number | undefined {
+  let k = i + 1;
+  while (k <= i + 2 && (isCue(board, k, 'of') || isCue(board, k, 'article'))) k++;
+  const isHalf = k === i + 1 && !isCue(board, i, 'half');
+  if (isHalf || board.taken[i] === true || isCue(board, i, 'number-word')) return undefined;
+  const isAmount = board.findings.some(
+    ({ field, from }) => from === k && ['mass_g', 'volume_L', 'additive_volume_mL'].includes(field),
+  );
+  return isAmount || hasTag(board, k, 'vessel:tank') || hasTag(board, k, 'vessel:barrel') ? k : undefined;
+}
+
+/** Beside none of these a tank is only spoken of: `tank two leaks`. */
+const READS = /^label:(ph|free|total|so2)$/;
+
+/** `tank two`: which one it is stands in words; `tank a`, `tank half` name no number. */
+const isNumberOfVessel = (board: Board, i: number): boolean =>
+  (['vessel:tank', 'vessel:barrel', 'vessel:cask', 'vessel:other'] as const).some((tag) =>
+    hasTag(board, i - 1, tag),
+  ) &&
+  board.taken[i - 1] !== true &&
+  !isCue(board, i, 'article') &&
+  !isShare(board, i) &&
+  !saysMany(termAt(board, i - 1)) &&
+  (board.findings.length > 0 ||
+    board.terms.some(({ kind, tags }) => kind === 'word' && tags.some((tag) => READS.test(tag))));
+
 /** Refuses a number in words where a figure should stand: `two barrels`, `half a pound`. */
 export function findNumberWord(board: Board): void {
   for (let i = 0; i < board.terms.length; i++) {
@@ -35,7 +62,16 @@ export function findNumberWord(board: Board): void {
       refuse(board, 'ambiguous-number', i, i + 1);
       continue;
     }
+    const halved = isShare(board, i) && termAt(board, i).kind === 'word' ? halvedEnd(board, i) : undefined;
+    if (halved !== undefined) {
+      refuse(board, 'ambiguous-number', i, halved);
+      continue;
+    }
     if (!isCue(board, i, 'number-word') || board.taken[i] === true) continue;
+    if (isNumberOfVessel(board, i)) {
+      refuse(board, 'ambiguous-number', i - 1, i);
+      continue;
+    }
     const to =
       isCue(board, i + 1, 'of') || isCue(board, i + 1, 'article') || isCue(board, i + 1, 'number-word')
         ? i + 2

@@ -84,6 +84,9 @@ function findCampden(board: Board, i: number): void {
     (_, k) => isCue(board, k, 'tablet') && countBefore(board, k - 1) !== undefined,
   );
   const counted = count ?? after ?? (apart < 0 ? undefined : countBefore(board, apart - 1));
+  // `campden 3 in 15 L`: three tablets, or free SO2?
+  if (counted === undefined && isFree(board, i + 1) && isCue(board, i + 2, 'in'))
+    return refuse(board, 'ambiguous-number', i, i + 1);
   if (counted !== undefined) find(board, 'tablets', figureAt(board, counted).value, 'unit', counted, counted);
 }
 

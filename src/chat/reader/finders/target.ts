@@ -35,6 +35,8 @@ function governedBeyond(board: Board, i: number, to: number): { aim: Aim; leadsT
   const aim = isPhLike(board, k) || !isVerbOfVessel ? undefined : aimAt(board, k);
   const isFirm = concentrationAt(board, k + 1) !== undefined || isCue(board, i, 'target');
   if (aim === undefined || aim.kind !== undefined || !isFirm) return undefined;
+  // `sulfiter cuve 3 à 30 mg/l`: so much of it, or up to there?
+  if (isCue(board, i, 'add') && !isCue(board, i, 'bring') && isCue(board, k - 1, 'also-at')) return undefined;
   return { aim, leadsTo: isCue(board, k - 1, 'to') };
 }
 

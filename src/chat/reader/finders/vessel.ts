@@ -1,31 +1,9 @@
 import type { Board } from '../board.ts';
-import { claim, find, hasTag, isCue, isFree, isMark, refuse, saysMany, termAt } from '../board.ts';
-import { MASS_UNITS, VOLUME_UNITS, concentrationAt, unitAt } from '../units.ts';
-
-/** One vessel as it stands in the text. */
-interface Named {
-  readonly name: string;
-  readonly kind: string;
-  readonly number?: number;
-  readonly from: number;
-  readonly to: number;
-}
-
-const isWholeAt = (board: Board, i: number): boolean =>
-  isFree(board, i) && termAt(board, i).value === undefined && /^\d{1,4}$/.test(termAt(board, i).text);
-
-/** Whether the number at `i` is a figure with a unit of its own, so that no vessel word may claim it. */
-function hasOwnUnit(board: Board, i: number): boolean {
-  return (
-    unitAt(board, i + 1, VOLUME_UNITS) !== undefined ||
-    unitAt(board, i + 1, MASS_UNITS) !== undefined ||
-    concentrationAt(board, i + 1) !== undefined ||
-    isMark(board, i + 1, '%') ||
-    isMark(board, i + 1, '°') ||
-    (isCue(board, i + 1, 'thousand') && termAt(board, i + 1).gap === false) ||
-    (isMark(board, i + 1, '/') && !termAt(board, i + 1).gap)
-  );
-}
+import { claim, find, hasTag, isCue, isMark, refuse, saysMany, termAt } from '../board.ts';
+import type { Named } from './vessel-word.ts';
+import { hasOwnUnit, isWholeAt, kindOf } from './vessel-word.ts';
+import { rowOrLevel } from './row-or-level.ts';
+import { rowFrom } from './vessel-row.ts';
 
 /** `4A` after a tank word: the letter belongs to the name. */
 function suffix(board: Board, i: number): { letter: string; to: number } {
@@ -33,12 +11,6 @@ function suffix(board: Board, i: number): { letter: string; to: number } {
   const letter = after?.kind === 'word' && !after.gap && /^[a-z]$/.test(after.text) && !hasOwnUnit(board, i);
   return letter ? { letter: after.text.toUpperCase(), to: i + 1 } : { letter: '', to: i };
 }
-
-const kindOf = (board: Board, i: number): string | undefined => {
-  if (hasTag(board, i, 'vessel:tank')) return 'tank';
-  if (hasTag(board, i, 'vessel:barrel') || hasTag(board, i, 'vessel:cask')) return 'barrel';
-  return hasTag(board, i, 'vessel:other') ? termAt(board, i).text.toUpperCase() : undefined;
-};
 
 /** `tank 4`, `tank #4`, `tank no. 4`, `barrel 17`, `tank B`. */
 function worded(board: Board, i: number): Named | undefined {
@@ -63,8 +35,9 @@ function worded(board: Board, i: number): Named | undefined {
     // `12 barrels 2 tablets of 5 g each`: two tablets for each of twelve.
     if (isWholeAt(board, i - 1) && saysMany(termAt(board, i)) && isCue(board, k + 1, 'tablet'))
       return undefined;
-    // `10 g/barrel 12 barrels`: twelve of them, and none with that number.
-    if (isMark(board, i - 1, '/') && hasTag(board, k + 1, 'vessel:barrel')) return undefined;
+    // `10 g/barrel 12 barrels`, `barrels: 2 barrels 225 L`: so many of them, and none with that number.
+    const counts = isMark(board, i - 1, '/') || (k > i + 1 && saysMany(termAt(board, k + 1)));
+    if (counts && hasTag(board, k + 1, 'vessel:barrel')) return undefined;
     const { letter, to } = suffix(board, k);
     const number = Number(termAt(board, k).text);
     return { name: `${kind} ${number}${letter}`, kind, ...(letter ? {} : { number }), from: i, to };
@@ -193,6 +166,7 @@ function leftOut(board: Board, first: Named, to: number): { numbers: readonly nu
   if (!isCue(board, k, 'except')) return { numbers, to };
   const isBracketed = isMark(board, to + 1, '(');
   for (k += 1; ; k += 1) {
+    if (isCue(board, k, 'article')) k += 1;
     const named = board.terms[k]?.kind === 'word' ? (worded(board, k) ?? coded(board, k)) : undefined;
     const isBare =
       isWholeAt(board, k) && !hasOwnUnit(board, k) && (numbers.length === 0 || isCue(board, k - 1, 'and'));
@@ -228,14 +202,17 @@ function anotherNumber(board: Board, { kind, from, to }: Named): number | undefi
 export function findVessel(board: Board): void {
   for (let i = 0; i < board.terms.length; i++) {
     if (board.taken[i] === true || termAt(board, i).kind !== 'word') continue;
-    const named = worded(board, i) ?? coded(board, i);
+    const row = rowFrom(board, i);
+    const named = row?.first ?? worded(board, i) ?? coded(board, i);
     if (!named) continue;
-    const last = rangeEnd(board, named);
+    const last = row?.last ?? rangeEnd(board, named);
     if (last) {
       i = findRange(board, named, last);
       continue;
     }
-    const another = anotherNumber(board, named);
+    const isWorded = named.number !== undefined && kindOf(board, named.from) === named.kind;
+    const another =
+      anotherNumber(board, named) ?? (isWorded ? rowOrLevel(board, named.number ?? 0, named.to) : undefined);
     if (another !== undefined) {
       refuse(board, 'ambiguous-number', named.from, another);
       i = another;
