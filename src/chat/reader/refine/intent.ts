@@ -181,12 +181,19 @@ function asksWhatWasDone(board: Board): boolean {
   );
 }
 
+/** `order 3 boxes of corks, 20 gal drums`: what is bought, and no wine. */
+const isErrand = (board: Board): boolean =>
+  isCue(board, 0, 'buy') &&
+  !hasAdditive(board) &&
+  !hasVessel(board) &&
+  !any(board, 'ph', 'free_mg_L', 'total_mg_L', 'target');
+
 /** What a message wants. With nothing that is ours it is chat. */
 export function decideIntent(board: Board): Intent {
   if (isSolution(board)) return 'solution';
   if (isAdded(board)) return 'added';
   if (isNegated(board) && !any(board, 'ph', 'free_mg_L') && !aimsAtLevel(board)) return 'chat';
-  if (isTrade(board) || asksWhatWasDone(board)) return 'chat';
+  if (isTrade(board) || isErrand(board) || asksWhatWasDone(board)) return 'chat';
   if (hasAmount(board) && isIdleMass(board)) return 'chat';
   if (isReading(board)) return 'reading';
   if (isEffect(board)) return 'effect';
