@@ -620,7 +620,7 @@ note-strength-as-salt = le titre est en grammes de sel dans 100 mL ; en SO2 ell
 note-strength-as-SO2 = le titre est en grammes de SO2 dans 100 mL
 note-mass-beside-readings = « { $text } », ce sont des grammes
 note-each-or-total = « { $text } » vaut pour chacun
-note-unread-words = Mots que je n’ai pas lus : { $text }
+note-unread-words = mots non lus : { $text }
 set-aside-figure = { $text }
 
 ## The one question

@@ -68,7 +68,7 @@ export const SOURCES = {
     title: 'trade figures of free SO2 lost to oxygen at bottling, not confirmed',
     read: false,
   },
-  'reussir-vigne': { title: 'Réussir Vigne, consultants’ answers on sulphiting', read: true },
+  'reussir-vigne': { title: 'Réussir Vigne', read: true },
   'german-trade-text-2012': { title: 'a German trade text of 2012 on SO2 in must', read: true },
   'food-additives-data-book': {
     title: 'Food Additives Data Book, p. 780',
