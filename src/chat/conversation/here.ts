@@ -105,7 +105,11 @@ export async function arrive(message: IncomingMessage, view: CellarView, default
     ...NO_FACTS,
     message,
     memory: { ...memory, decimalMark },
-    settings: { ...mergeSettings(defaults, set), language },
+    settings: {
+      ...mergeSettings(defaults, set),
+      language,
+      ...(languages.changedFrom !== undefined && { languageBefore: languages.changedFrom }),
+    },
     ...languages,
     me,
     roster,

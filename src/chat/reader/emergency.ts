@@ -46,6 +46,11 @@ function indexOf(lists: readonly Words[]): ReadonlyMap<string, readonly Phrase[]
 
 const INDEX = indexOf(ALL_WORDS);
 
+/** The words that lead to a level in any language. */
+const TO_WORDS: ReadonlySet<string> = new Set(
+  ALL_WORDS.flatMap(({ says }) => [...(says['cue:to'] ?? []), ...(says['cue:joined'] ?? [])]),
+);
+
 /** The groups that make an emergency or open one; without any of them nothing further is looked at. */
 const OPENERS: ReadonlySet<DangerId> = new Set<DangerId>([
   'down',
@@ -139,6 +144,15 @@ const isDropped = (hits: Hits): boolean =>
 
 const isGas = (hits: Hits): boolean => has(hits, 'gas') && has(hits, 'smell') && has(hits, 'place');
 
+/** `von 30 auf 20 gefallen`, `fell to 14`: it is a figure that fell. */
+function isFigure(words: readonly string[], { from, to }: Hit): boolean {
+  const leads = (k: number): boolean => TO_WORDS.has(words[k] ?? '');
+  const number = (k: number): boolean => /^\d+([.,]\d+)?$/.test(words[k] ?? '');
+  const before = [1, 2, 3].find((back) => number(from - back));
+  if (before !== undefined && leads(from - before - 1)) return true;
+  return leads(to + 1) && number(to + 2);
+}
+
 /** What the danger is, where there is one; the matter that the reply begins with. */
 function dangerOf(hits: Hits, words: readonly string[]): Danger | undefined {
   if (all(hits, 'hurt-eye').some(({ to }) => !(words[to] === 'eyes' && words[to + 1] === 'of')))
@@ -161,7 +175,9 @@ function dangerOf(hits: Hits, words: readonly string[]): Danger | undefined {
   if (has(hits, 'mixed') && has(hits, 'chemical') && has(hits, 'reactive') && isChlorine(hits, words))
     return 'gas';
   if (literal(hits, 'alarm').length > 0 && !has(hits, 'elsewhere')) return 'person';
-  const isFall = all(hits, 'fell').some((hit) => !isThing(hits, words, hit));
+  const isFall = all(hits, 'fell').some(
+    (hit) => !isThing(hits, words, hit) && (has(hits, 'person') || !isFigure(words, hit)),
+  );
   if (isFall && vessel && !isDropped(hits)) return 'person';
   if (!has(hits, 'silent')) return undefined;
   const inside = all(hits, 'went-in').some((hit) => !isThing(hits, words, hit));

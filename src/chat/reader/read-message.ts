@@ -64,7 +64,7 @@ export function setBoard(
     taken: [],
     cues: cuesOf(terms, lexicon),
     lexicon,
-    grouping: groupingOf(terms, lexicon, settings.language),
+    grouping: groupingOf(terms, lexicon, settings.languageBefore ?? settings.language),
     settings,
     findings: [],
     problems: [],

@@ -251,6 +251,8 @@ export interface Understood {
 /** What the reader has to know of the chat. */
 export interface ReaderSettings {
   readonly language: Language;
+  /** The chat's language until this message, where it is the first in another one: both must group thousands alike. */
+  readonly languageBefore?: Language;
   readonly gallon: 'US' | 'imperial';
   readonly usualAdditive: AdditiveId;
   /** Its strength, where it is not pure. */

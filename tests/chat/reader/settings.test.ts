@@ -50,7 +50,7 @@ test.each([
   ['en', '1,200 L', 1200],
   ['de', '1,200 L', 'ambiguous-number'],
   ['en', '1.200 L', 'ambiguous-number'],
-  ['de', 'Tank vier hat 1.200 L, frei 18', 1200],
+  ['de', 'der Tank hat 1.200 L, frei 18', 1200],
   ['de', 'gisteren overgeheveld 1.200 L', 'ambiguous-number'],
   ['de', 'aujourd’hui soutiré 1.200 L', 'ambiguous-number'],
   ['es', 'vasca da 1.200 L', 1200],

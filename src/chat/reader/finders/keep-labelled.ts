@@ -3,6 +3,7 @@ import type { Board, Said } from '../board.ts';
 import { decimalAt, figureAt, find, hasTag, isMark, placeOf, refuse } from '../board.ts';
 import type { LabelId } from '../words/words.ts';
 import { concentrationAt, mg_L_IN } from '../units.ts';
+import { mayBeOrder } from '../refine/may-be-order.ts';
 import type { Beside } from './figure-beside.ts';
 
 /** A figure without the word free is free SO2 up to this; above it may be total (mg/L). */
@@ -61,13 +62,19 @@ export function keepFigure(board: Board, label: LabelId, beside: Beside, from: n
       from,
       to,
     );
-  } else if (label === 'so2') keepBareSO2(board, value, from, to);
+  } else if (label === 'so2') keepBareSO2(board, beside.at, value, { from, to });
   else if (label === 'volume') refuse(board, 'ambiguous-number', from, to);
 }
 
 /** `SO2 18` is free SO2 up to 60 and said; above it may be total: ask. */
-function keepBareSO2(board: Board, value: number, from: number, to: number): void {
-  if (value > MOST_UNLABELLED_FREE_mg_L) return refuse(board, 'ambiguous-number', from, to);
+function keepBareSO2(
+  board: Board,
+  at: number,
+  value: number,
+  { from, to }: { readonly from: number; readonly to: number },
+): void {
+  if (value > MOST_UNLABELLED_FREE_mg_L || mayBeOrder(board, at))
+    return refuse(board, 'ambiguous-number', from, to);
   board.notes.push({ id: 'free-unlabelled', text: placeOf(board, from, to).text });
   find(board, 'free_mg_L', value, 'bare', from, to);
 }

@@ -67,6 +67,11 @@ export function findNumberWord(board: Board): void {
       refuse(board, 'ambiguous-number', i, halved);
       continue;
     }
+    // `mezza dose`: half of what is still to be reckoned.
+    if (isCue(board, i, 'half') && isCue(board, i + 1, 'how-much')) {
+      refuse(board, 'ambiguous-number', i, i + 1);
+      continue;
+    }
     if (!isCue(board, i, 'number-word') || board.taken[i] === true) continue;
     if (isNumberOfVessel(board, i)) {
       refuse(board, 'ambiguous-number', i - 1, i);

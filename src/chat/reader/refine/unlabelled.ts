@@ -17,6 +17,7 @@ import { isCellarTalk } from '../cellar-talk.ts';
 import { MOST_UNLABELLED_FREE_mg_L } from '../finders/keep-labelled.ts';
 import { isPhLike } from '../ph-like.ts';
 import { holdsUnknownVerb, isNegated, isOfUnknown, speaksOfAdding } from './unsaid.ts';
+import { mayBeOrder } from './may-be-order.ts';
 import { isStranger, strangerBefore } from '../stranger.ts';
 import { concentrationAt, mg_L_IN } from '../units.ts';
 
@@ -46,32 +47,9 @@ function mayBeVintage(board: Board, i: number): boolean {
 const isAfterInto = (board: Board, i: number): boolean =>
   isCue(board, i - 1, 'in') && !isCue(board, i - 1, 'is');
 
-/** `50 ppm in 12 hl kmbs` may be what is to go in. */
-const mayGoIn = (board: Board, i: number): boolean => {
-  const unit = concentrationAt(board, i + 1);
-  const into = unit !== undefined && isCue(board, unit.to + 1, 'into');
-  return (
-    into &&
-    isFound(board, 'additive') &&
-    board.findings.some(({ field, from }) => field === 'volume_L' && from === unit.to + 2)
-  );
-};
-
 /** `50 of kmbs`: grams or mg/L of an additive, and no reading. */
 const isOfAdditive = (board: Board, i: number): boolean =>
   isCue(board, i + 1, 'of') && board.terms[i + 2]?.tags.some((tag) => tag.startsWith('additive:')) === true;
-
-/** `again 20 ppm`, `20 ppm to the must`, `20 mg/l braucht T4`: what is to go in, or what is there? Nobody can tell. */
-function mayBeOrder(board: Board, i: number): boolean {
-  if (isCue(board, i - 1, 'again')) return true;
-  const unit = concentrationAt(board, i + 1);
-  if (unit === undefined) return false;
-  const next = board.terms[unit.to + 1]?.tags.includes('label:so2') === true ? unit.to + 2 : unit.to + 1;
-  if (isCue(board, next, 'again') || (isCue(board, next, 'need') && !isFree(board, next + 1))) return true;
-  const must = board.findings.find(({ field, value }) => field === 'stage' && value === 'must');
-  const leads = isCue(board, next, 'into') || isCue(board, next, 'to');
-  return leads && must !== undefined && must.to >= next && must.to <= next + 2;
-}
 
 /** An article alone names no tank: `the 4`. */
 const isAfterArticle = (board: Board, i: number): boolean =>
@@ -127,7 +105,7 @@ function findFree(board: Board, candidates: readonly number[]): void {
   const fine =
     !speaksOfAdding(board) &&
     !isOfUnknown(board, only) && !((unit !== undefined || !board.lexicon.isTold) && holdsUnknownVerb(board)) &&
-    only !== undefined && figure !== undefined && !isOfAdditive(board, only) && !isTaken && rangeEnd(board, only) === undefined && !isAfterInto(board, only) && !isAfterArticle(board, only) && !mayGoIn(board, only) && !mayBeOrder(board, only) &&
+    only !== undefined && figure !== undefined && !isOfAdditive(board, only) && !isTaken && rangeEnd(board, only) === undefined && !isAfterInto(board, only) && !isAfterArticle(board, only) && !mayBeOrder(board, only) &&
     vintage === undefined && !isMark(board, only + 1, '/') && !isMark(board, only - 1, '/') && figure.value <= MOST_UNLABELLED_FREE_mg_L && (isWhole(board, only) || unit !== undefined) && unit?.id !== 'g/L'; // prettier-ignore
   if (fine && figure.value < 0) return refuse(board, 'negative-value', figure.from, only);
   if (fine) {
