@@ -225,7 +225,7 @@ dose-at-limit =
         }
     }
 dose-over-already = Así no se puede vender según esa ley{ law-decides }: pregunta a quien responde de este vino.
-law-assumed = Sin dato, tomado por lo más estricto para el límite: { $list }.
+law-assumed = Sin dato, se toma el límite más estricto: { $list }.
 law-unknown =
     { $code ->
         [colour-assumed] color
@@ -238,11 +238,11 @@ dose-capped-kept =
         [none] Se guardan { $kept } { $unit } por debajo, pues un { $of ->
             [free] libre
            *[total] total
-        } medido puede errar tanto. Lo que buscas lo pasaría.
+        } medido puede errar tanto. Tu objetivo lo superaría.
        *[some] Se guardan { $kept } { $unit } por debajo: { $error } porque un { $of ->
             [free] libre
            *[total] total
-        } medido puede errar tanto, { $reserve } para el embotellado. Lo que buscas lo pasaría.
+        } medido puede errar tanto, { $reserve } para el embotellado. Tu objetivo lo superaría.
     }
 full-dose-asks =
     { $of ->

@@ -235,11 +235,11 @@ dose-capped-kept =
         [none] Tengo { $kept } { $unit } sotto il limite: la { $of ->
             [free] libera
            *[total] totale
-        } misurata può sbagliare di tanto. Il tuo obiettivo lo passerebbe.
+        } misurata può sbagliare di tanto. Il tuo obiettivo lo supererebbe.
        *[some] Tengo { $kept } { $unit } sotto il limite: { $error } perché la { $of ->
             [free] libera
            *[total] totale
-        } misurata può sbagliare di tanto, { $reserve } per l’imbottigliamento. Il tuo obiettivo lo passerebbe.
+        } misurata può sbagliare di tanto, { $reserve } per l’imbottigliamento. Il tuo obiettivo lo supererebbe.
     }
 full-dose-asks =
     { $of ->
@@ -2166,7 +2166,7 @@ titration-strength = { $unit ->
 titration-iodate = { $mass } mg di iodato in { $volume } mL
 titration-ascorbic = acido ascorbico { $amount } mg/L
 titration-free-assumed = Presa come SO2 libera; scrivi “totale” se il campione è preparato per la totale.
-titration-no-blank = Nessun bianco tolto; se l’hai fatto aggiungi “bianco 0,1”.
+titration-no-blank = Nessun bianco sottratto; se l’hai fatto aggiungi “bianco 0,1”.
 titration-asks = { $missing ->
     [method] Titolata con soda (AO) o con iodio? Scrivilo: AO 20 mL di campione, 1,9 mL 0,01 N
     [sample] Quanti mL di vino? Mandala intera: { $method ->

@@ -10,7 +10,7 @@ export const speaksOfAdding = (board: Board): boolean =>
       (['past', 'past-if-accented', 'add', 'add-behind', 'raise'] as const).some((cue) =>
         isCue(board, i, cue),
       ) ||
-      (isCue(board, i, 'target') && !isFound(board, 'target')),
+      ((isCue(board, i, 'target') || isCue(board, i, 'bring')) && !isFound(board, 'target')),
   );
 
 /** A word in small letters that no list knows: in a language that is not read in full it may be the verb. */
