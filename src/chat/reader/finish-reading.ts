@@ -150,6 +150,8 @@ function work(
     if (!isAmount(fields) && fields.added_mg_L === undefined && fields.rate_mg_L === undefined)
       asks.add('mass_g');
     if (fields.rate_mg_L !== undefined && unknownVolume) asks.add('volume_L');
+    // The log must not name a salt that nobody named: `added 1.2 L bisulfite 15%`.
+    if (marks.unnamedAdditive && fields.additive === undefined) asks.add('additive');
     return { assumed: { ...additive, ...base }, asks };
   }
   if (intent === 'command' && draft.command?.name === 'order') {
