@@ -45,7 +45,7 @@ export function findLetterPair(board: Board): void {
   for (let i = 0; i < board.terms.length; i++) {
     const free = letterAt(board, i, FREE_LETTERS);
     if (free === undefined || (board.terms[i - 1]?.kind === 'number' && !termAt(board, i).gap)) continue;
-    const next = isMark(board, free + 1, ',') || isMark(board, free + 1, '/') ? free + 2 : free + 1;
+    const next = [',', '/', ';', '|'].some((mark) => isMark(board, free + 1, mark)) ? free + 2 : free + 1;
     // `F 18 G 60`: 18 grams, or free and "gesamt"?
     const grams = letterAt(board, next, new Set(['g']));
     if (grams !== undefined) {

@@ -29,7 +29,7 @@ function worded(board: Board, i: number): Named | undefined {
     (isMark(board, k, '°') && isCue(board, k - 1, 'number-sign'))
   )
     k++;
-  if (k > i + 3) return undefined;
+  if (k > i + 4) return undefined;
   if (isWholeAt(board, k) && !hasOwnUnit(board, k)) {
     if (isCue(board, k + 1, 'times') || isMark(board, k + 1, '×')) return undefined;
     // `12 barrels 2 tablets of 5 g each`: two tablets for each of twelve.
