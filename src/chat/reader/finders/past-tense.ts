@@ -1,5 +1,6 @@
 import type { Board } from '../board.ts';
-import { holdsCue, isCue, isFree, isMark, placeOf, refuse, termAt } from '../board.ts';
+import { concentrationAt } from '../units.ts';
+import { holdsCue, isCue, isFree, isMark, placeOf, refuse, setAside, termAt } from '../board.ts';
 
 /** Whether a cue stands somewhere between two terms. */
 function cueBetween(
@@ -84,9 +85,19 @@ export function findPastTense(board: Board): void {
       board.taken[i] !== true &&
       (isPast(board, i) || ((isCue(board, i, 'put') || isGot(board, i)) && holdsCue(board, 'past-time'))),
   );
+  const notPut = board.terms.findIndex((_, i) => isCue(board, i, 'put') && isCue(board, i - 1, 'not'));
+  if (notPut >= 0) passOverFigure(board, notPut);
   if (said < 0 && !declined && !board.pastTense) findUnclearVerb(board);
   if (said < 0 || declined) return;
   board.pastTense = isToldAsFact(board, said);
   const negated = cueBetween(board, clauseFrom(board, said), said, 'not') || saysNo(board, said);
-  if (negated) board.notes.push({ id: 'negated', text: '' });
+  if (!negated) return;
+  board.notes.push({ id: 'negated', text: '' });
+  passOverFigure(board, said);
+}
+
+/** `haven't added 25 ppm`: what did not go in is no reading. */
+function passOverFigure(board: Board, verb: number): void {
+  const unit = isFree(board, verb + 1) ? concentrationAt(board, verb + 2) : undefined;
+  if (unit !== undefined) setAside(board, verb + 1, unit.to);
 }

@@ -121,6 +121,10 @@ function findVerb(board: Board, i: number): void {
   const found = governed(board, i);
   if (!found) return;
   const { aim, label, leadsTo } = found;
+  // `pick it up at 6`: a time, and no figure of the wine.
+  const isClock =
+    isCue(board, i, 'raise') && isCue(board, i + 1, 'clock-before') && isCue(board, i + 1, 'is');
+  if (isClock && concentrationAt(board, aim.from + 1) === undefined) return setAside(board, i, aim.to);
   if (isRange(board, aim)) return refuse(board, 'ambiguous-number', aim.from, aim.to + 2);
   if (isCue(board, i, 'need') && label === 'ph') return;
   if (isAt(board, i, found)) return;

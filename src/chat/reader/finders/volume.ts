@@ -13,7 +13,7 @@ import {
   labelBefore,
 } from '../board.ts';
 import { litresOf, noteUnit } from './barrels.ts';
-import { sizeOfBottles } from './size-of-bottles.ts';
+import { isOfSize, sizeOfBottles } from './size-of-bottles.ts';
 import type { UnitAt } from '../units.ts';
 import { VOLUME_UNITS, unitAt } from '../units.ts';
 
@@ -72,10 +72,17 @@ const isFlow = (board: Board, i: number): boolean =>
 
 /** `300 bottles of 750 mL`: how many, before the size at term `i`. */
 function bottlesBefore(board: Board, i: number): number | undefined {
-  const at = isCue(board, i - 1, 'of') ? i - 3 : i - 2;
+  const at = isOfSize(board, i - 1) ? i - 3 : i - 2;
   const isCount = isCue(board, at + 1, 'bottle-unit') && isFree(board, at) && figureAt(board, at).value > 0;
   return isCount && sizeOfBottles(board, at + 2) === i ? at : undefined;
 }
+
+/** `topped barrel 7 with 2 L; 3.5, free 18`: what went in, and not what the vessel holds. */
+const isToppedWith = (board: Board, i: number): boolean =>
+  isCue(board, i - 1, 'with') &&
+  board.tells !== true &&
+  board.terms.slice(0, i).some((_, k) => isCue(board, k, 'vessel-statement')) &&
+  (board.cues.has('label:ph') || board.cues.has('label:free'));
 
 /** Reads the volume at term `i`, with the sum or the second unit that belongs to it; gives back its last term. */
 function findVolumeAt(board: Board, i: number): number {
@@ -85,6 +92,10 @@ function findVolumeAt(board: Board, i: number): number {
   const isGlued = labelBefore(board, i) === i - 1 && /^\d{1,3},\d{3}$/.test(termAt(board, i).text);
   if (isGlued || volume.figure.unsure || Number.isNaN(volume.figure.value)) {
     refuse(board, 'ambiguous-number', i, volume.unit.to);
+    return volume.unit.to;
+  }
+  if (isToppedWith(board, i)) {
+    refuse(board, 'ambiguous-number', i - 1, volume.unit.to);
     return volume.unit.to;
   }
   if (isRange(board, i)) {

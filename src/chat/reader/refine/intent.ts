@@ -181,10 +181,19 @@ function asksWhatWasDone(board: Board): boolean {
   );
 }
 
+/** `300 L of diesel`, `20 L of water`: a volume of something else. */
+function isOfOther(board: Board): boolean {
+  const volume = findingOf(board, 'volume_L');
+  if (volume === undefined || any(board, 'style', 'category', 'product', 'stage')) return false;
+  const k = isCue(board, volume.to + 1, 'of') ? volume.to + 2 : volume.to + 1;
+  return (k > volume.to + 1 && isStranger(board, k)) || isCue(board, k, 'water');
+}
+
 /** `order 3 boxes of corks, 20 gal drums`: what is bought, and no wine. */
 const isErrand = (board: Board): boolean =>
-  isCue(board, 0, 'buy') &&
+  (isOfOther(board) || (isCue(board, 0, 'buy') && isCue(board, 2, 'bag'))) &&
   !hasAdditive(board) &&
+  !hasAmount(board) &&
   !hasVessel(board) &&
   !any(board, 'ph', 'free_mg_L', 'total_mg_L', 'target');
 
