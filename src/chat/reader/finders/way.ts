@@ -1,11 +1,14 @@
 import type { Board } from '../board.ts';
 import { isCellarTalk } from '../cellar-talk.ts';
+import { isPhLike } from '../ph-like.ts';
 import { concentrationAt } from '../units.ts';
 import { find, isCue, isFree, isMark, refuse, hasTag, isLabelled } from '../board.ts';
 import { MOST_BARE_MOLECULAR_mg_L, aimAt, isArrow, keepTarget, kindAt, skipJoins } from './aim.ts';
 
 /** A step of less than this between two figures may be a range, not a way from one to the other. */
 const SMALLEST_CLEAR_STEP_mg_L = 5;
+
+const isPhNamed = (board: Board): boolean => board.terms.some((_, k) => hasTag(board, k, 'label:ph'));
 
 /** `from 18 to 32`, `free 18 to 32`, `18 -> 32`: where it is and where it should go. */
 function findWayAt(board: Board, i: number): boolean {
@@ -22,6 +25,16 @@ function findWayAt(board: Board, i: number): boolean {
   // `alc 13.5 -> 35`, `total 170 to 30 free`: the first figure is its label's own.
   if (before === undefined && isLabelled(board, i) && !hasTag(board, labelAt, 'label:so2')) return false;
   if (before === 'total' && (second.kind === 'free' || second.kind === 'molecular')) return false;
+  // `pH 3.5 free to 32`: the pH is its label's own, and the word behind it opens the next field.
+  if (before === 'ph' && first.kind === 'free' && isPhLike(board, i) && !isPhLike(board, second.from))
+    return false;
+  // `3.5 free to 32` with no pH named: a pH, or a free SO2 of 3.5?
+  const isBare =
+    before === undefined && !isCue(board, i - 1, 'from') && concentrationAt(board, i + 1) === undefined;
+  if (isBare && first.kind === 'free' && isPhLike(board, i) && !isPhNamed(board)) {
+    refuse(board, 'ambiguous-number', i, second.to);
+    return true;
+  }
   if (before === 'ph' || before === 'molecular') {
     refuse(board, 'ambiguous-number', i, second.to);
     return true;
