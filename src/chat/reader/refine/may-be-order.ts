@@ -19,9 +19,13 @@ const mayGoIn = (board: Board, i: number): boolean => {
   );
 };
 
+/** `2 t`: tonnes, or a tank without its number. */
+const isTonnes = (board: Board, i: number): boolean =>
+  board.terms[i + 1]?.text === 't' && board.terms[i + 2]?.kind !== 'number';
+
 /** `again 20 ppm`, `20 ppm to the must`, `20 mg/l braucht T4`: what is to go in, or what is there? Nobody can tell. */
 export function mayBeOrder(board: Board, i: number): boolean {
-  if (isCue(board, i - 1, 'again')) return true;
+  if (isCue(board, i - 1, 'again') || isTonnes(board, i)) return true;
   const unit = concentrationAt(board, i + 1);
   if (unit === undefined) return false;
   const next = hasTag(board, unit.to + 1, 'label:so2') ? unit.to + 2 : unit.to + 1;

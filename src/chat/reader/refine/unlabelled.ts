@@ -17,6 +17,7 @@ import { isCellarTalk } from '../cellar-talk.ts';
 import { MOST_UNLABELLED_FREE_mg_L } from '../finders/keep-labelled.ts';
 import { isPhLike } from '../ph-like.ts';
 import { holdsUnknownVerb, isNegated, isOfUnknown, speaksOfAdding } from './unsaid.ts';
+import { isForeignAim } from '../foreign-aim.ts';
 import { mayBeOrder } from './may-be-order.ts';
 import { isStranger, strangerBefore } from '../stranger.ts';
 import { concentrationAt, mg_L_IN } from '../units.ts';
@@ -222,7 +223,8 @@ function setStrangersAside(board: Board): void {
     if (!isFree(board, i)) continue;
     const to = concentrationAt(board, i + 1)?.to ?? i;
     const before = matterBefore(board, i, labelled);
-    if (before !== undefined) setAside(board, before, to);
+    if (isForeignAim(board, i - 1)) refuse(board, 'ambiguous-number', i - 1, to);
+    else if (before !== undefined) setAside(board, before, to);
     else if (isStranger(board, to + 1) && (labelled || isPhLike(board, i))) setAside(board, i, to + 1);
     else if (isCue(board, i - 1, 'not')) refuse(board, 'ambiguous-number', i - 1, to);
     else if (isMark(board, i - 1, '<') || isMark(board, i - 1, '>'))
