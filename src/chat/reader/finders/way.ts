@@ -35,14 +35,9 @@ function findWayAt(board: Board, i: number): boolean {
     refuse(board, 'ambiguous-number', i, second.to);
     return true;
   }
-  const isBy =
-    isCue(board, i - 1, 'by') && !isCue(board, i - 1, 'from') && !isCue(board, i - 1, 'from-too');
+  const isBy = isCue(board, i - 1, 'by') && !isCue(board, i - 1, 'from') && !isCue(board, i - 1, 'from-too');
   // `um 15 ppm auf 35 ppm`, `by 15 to 35`: what is added and where it ends, and no reading.
-  if (
-    before === 'ph' ||
-    before === 'molecular' ||
-    (isBy && !isCue(board, i - 1, 'from-too'))
-  ) {
+  if (before === 'ph' || before === 'molecular' || (isBy && !isCue(board, i - 1, 'from-too'))) {
     refuse(board, 'ambiguous-number', i, second.to);
     return true;
   }
