@@ -1,6 +1,6 @@
 import { ALL_WORDS } from './words/all.ts';
 import type { QuestionId } from './words/words.ts';
-import type { Draft, FieldName } from './understood.ts';
+import type { Draft, FieldName, Intent } from './understood.ts';
 
 /** One of several ways to put a word of a question; with a star it is the beginning of a word. */
 type Way = string;
@@ -42,6 +42,14 @@ const TOPICS: ReadonlySet<string> = new Set(PATTERNS.map(({ topic }) => topic));
 export const isQuestion = (topic: string | undefined): topic is QuestionId =>
   topic !== undefined && TOPICS.has(topic);
 
+const OF_ANY_WINE = PATTERNS.filter(({ isOfAnyWine }) => isOfAnyWine);
+
+/** What has happened, or is a word of the bot's own, asks nothing. */
+const TOLD: readonly Intent[] = ['added', 'reading', 'titration', 'emergency', 'command'];
+
+/** A longer message tells a story, in words and marks; own threshold. */
+const LONGEST_QUESTION = 60;
+
 /** What a message about one's own wine carries: with one of these it is no question about the trade. */
 const OF_ONES_WINE: readonly FieldName[] = [
   'vessel', 'vessels', 'volume_L', 'ph', 'total_mg_L', 'mass_g', 'additive_volume_mL', 'tablets', 'rate_mg_L', 'added_mg_L',
@@ -69,14 +77,12 @@ function isOfOnesWine({ intent, fields, command }: Draft): boolean {
  * ```
  */
 export function questionTopic(texts: readonly string[], draft: Draft): QuestionId | undefined {
+  if (texts.length > LONGEST_QUESTION) return undefined;
   const isOfOwn = isOfOnesWine(draft);
-  const isTold = ['added', 'reading', 'titration', 'emergency', 'command'].includes(draft.intent);
+  if (isOfOwn && TOLD.includes(draft.intent)) return undefined;
   const text = ` ${texts.join(' ')} `;
   const holds = (way: Way): boolean => text.includes(way);
-  return PATTERNS.find(
-    ({ groups, without, isOfAnyWine }) =>
-      (!isOfOwn || (isOfAnyWine && !isTold)) &&
-      groups.every((group) => group.some(holds)) &&
-      !without.some(holds),
+  return (isOfOwn ? OF_ANY_WINE : PATTERNS).find(
+    ({ groups, without }) => groups.every((group) => group.some(holds)) && !without.some(holds),
   )?.topic;
 }

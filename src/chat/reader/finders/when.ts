@@ -66,12 +66,10 @@ function isOfVessel({ pieces, terms }: Board, k: number): boolean {
   return before.text === 't' || terms[before.to]?.tags.some((tag) => tag.startsWith('vessel:')) === true;
 }
 
-function partAt(board: Board, k: number): Part | undefined {
+function partAt(board: Board, k: number, hasAgo: boolean): Part | undefined {
   const { pieces } = board;
   if (!mayOpen(pieces, k) || isOfVessel(board, k)) return undefined;
-  const ago = pieces.some(({ ids }) => ids.includes('ago') || ids.includes('ago-before'))
-    ? agoAt(pieces, k)
-    : undefined;
+  const ago = hasAgo ? agoAt(pieces, k) : undefined;
   if (ago) return { ...ago, from: k, isPast: true, isClaimed: true };
   const found = dayAt(pieces, k);
   if (found) {
@@ -90,11 +88,18 @@ function partAt(board: Board, k: number): Part | undefined {
     : undefined;
 }
 
+/** A message with more days and times than this tells of many things, and is read in no time; own threshold. */
+const MOST_PARTS = 12;
+
 function partsOf(board: Board): Part[] {
   const parts: Part[] = [];
+  const hasAgo = board.pieces.some(({ ids }) => ids.includes('ago') || ids.includes('ago-before'));
+  let seen = 0;
   for (let k = 0; k < board.pieces.length; k++) {
-    const part = partAt(board, k);
+    const part = partAt(board, k, hasAgo);
     if (!part) continue;
+    seen += 1;
+    if (seen > MOST_PARTS) return [];
     if (stands(board, part)) parts.push(part);
     k = part.to;
   }
