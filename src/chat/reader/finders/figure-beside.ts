@@ -134,8 +134,10 @@ export function figureBeside(board: Board, i: number, label: LabelId): Beside | 
   if (fits(label, figure(after)) !== fits(label, figure(before)))
     return fits(label, figure(after)) ? after : before;
   const next = labelAt(board, after.to + 1);
+  // `SO2 18 total 60`: the figure before has a label of its own.
+  const isOfSO2 = label === 'total' && hasTag(board, before.at - 1, 'label:so2');
   if (next === undefined)
-    return board.terms[after.to + 1]?.kind === 'number' || !board.terms[before.at]?.gap
+    return isOfSO2 || board.terms[after.to + 1]?.kind === 'number' || !board.terms[before.at]?.gap
       ? after
       : isPrefixed(board, i)
         ? after

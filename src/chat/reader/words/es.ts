@@ -43,7 +43,7 @@ export const es: Words = {
     'cue:add': ['faltan', 'falta', 'le faltan', 'le falta', 'nos faltan', 'anadir', 'anade', 'anado', 'anadimos', 'anadid', 'anadirle', 'agregar', 'agrega', 'agregamos', 'echar', 'echa', 'echarle', 'echale', 'poner', 'ponle', 'pon', 'ponemos', 'ponerle', 'adicionar', 'adiciona', 'sulfitar', 'dosificar', 'adicion de', 'adicion', 'incorporar', 'meter', 'metele', 'tirar', 'dosis de', 'hay que anadir', 'para anadir', 'sumar', 'agregale', 'anadele', 'corregir con', 'eche', 'agregue', 'agrego', 'adicione', 'anada', 'incorpore', 'dosifique', 'echeis', 'añadais', 'eches', 'añadas', 'pongas', 'pongais', 'agregues', 'echen', 'añadan', 'agreguen', 'pongan', 'ponga', 'echad', 'poned', 'dosis'],
     'cue:addition': ['de adicion', 'adicion', 'mas', 'extra', 'a anadir', 'por anadir', 'de mas', 'de dosis', 'de correccion'],
     'cue:add-behind': ['a anadir', 'por anadir', 'para anadir', 'a agregar', 'de adicion'],
-    'cue:need': ['necesito', 'necesita', 'necesitamos', 'necesitan', 'hace falta', 'hacen falta', 'quiero', 'quiere', 'queremos', 'requiere'],
+    'cue:need': ['prueba con', 'probar con', 'probamos con', 'pruebo con', 'necesito', 'necesita', 'necesitamos', 'necesitan', 'hace falta', 'hacen falta', 'quiero', 'quiere', 'queremos', 'requiere'],
     'cue:molecular': ['molecular', 'so2 molecular', 'activo', 'so2 activo', 'molecul', 'molecular so2', 'sulfuroso molecular', 'sulfuroso activo'],
     'cue:by': ['en'],
     'cue:binds': ['se combina', 'se combinan', 'combina', 'combinado', 'se une', 'queda combinado', 'se liga', 'se pierde', 'se combinara', 'de la adicion se combina', 'de lo anadido se combina', 'de la dosis se combina', 'se queda combinado'],

@@ -46,7 +46,7 @@ export const it: Words = {
     'cue:add': ['mancano', 'manca', 'ne mancano', 'aggiungere', 'aggiungi', 'aggiungo', 'aggiungiamo', 'aggiungete', 'aggiunta', 'aggiunta di', 'mettere', 'metti', 'metto', 'mettiamo', 'mettici', 'metterci', 'dosare', 'dosa', 'solfitare', 'dose di', 'immettere', 'versare', 'versa', 'dare', 'da aggiungere', 'aggiungerci', 'aggiungine', 'incorporare', 'integrare'],
     'cue:addition': ['di aggiunta', 'in piu', 'da aggiungere', 'aggiunti in piu', 'extra', 'da dare', 'da mettere'],
     'cue:add-behind': ['da aggiungere', 'da mettere', 'di aggiunta', 'da dare'],
-    'cue:need': ['serve', 'servono', 'mi serve', 'mi servono', 'ci vuole', 'ci vogliono', 'bisogno di', 'ho bisogno di', 'voglio', 'vogliamo', 'vuole', 'vorrei', 'occorre', 'occorrono', 'devo avere'],
+    'cue:need': ['prova con', 'provare con', 'proviamo con', 'provo con', 'serve', 'servono', 'mi serve', 'mi servono', 'ci vuole', 'ci vogliono', 'bisogno di', 'ho bisogno di', 'voglio', 'vogliamo', 'vuole', 'vorrei', 'occorre', 'occorrono', 'devo avere'],
     'cue:molecular': ['molecolare', 'so2 molecolare', 'attiva', 'so2 attiva', 'di molecolare', 'molec', 'solforosa molecolare', 'molecolare so2', 'attivo'],
     'cue:by': ['di'],
     'cue:binds': ['si combina', 'si combinano', 'combina', 'si lega', 'viene combinata', 'viene combinato', 'si perde', "dell'aggiunta si combina", 'della dose si combina', 'si combinera', 'va in combinata', 'va combinato', 'viene legato', 'si combinera', 'e combinato', 'va combinata', 'resta combinata'],
