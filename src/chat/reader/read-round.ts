@@ -4,6 +4,7 @@ import type { Command } from './command.ts';
 import { finishReading } from './finish-reading.ts';
 import { notUnderstood } from './not-understood.ts';
 import { readDraft } from './read-draft.ts';
+import { sharedFields } from './shared-fields.ts';
 import type { Term } from './split-terms.ts';
 import { termIn } from './split-terms.ts';
 import { withHeading, type Heading } from './with-heading.ts';
@@ -121,17 +122,6 @@ const DAY_AND_MONTH = /^(0?[1-9]|1[0-2])\/(0?[1-9]|[12]\d|3[01])$|^(0?[1-9]|[12]
 const isDoubtful = (line: LineRead): boolean =>
   line.draft.intent !== 'chat' &&
   line.draft.problems.some(({ about }) => carriesFacts(line) || !DAY_AND_MONTH.test(about));
-
-/** Facts that may hold for several tanks: never a measured figure of one. */
-function sharedFields({
-  ph: _ph,
-  free_mg_L: _free,
-  total_mg_L: _total,
-  volume_L: _volume,
-  ...fields
-}: Fields): Fields {
-  return fields;
-}
 
 /** A line takes from the first what it does not say itself: its facts, and the wish to note a reading. */
 function withShared(draft: Draft, shared: Draft | undefined): Draft {

@@ -130,6 +130,8 @@ export const de: Words = {
     'cue:should': ['soll sein', 'sollte sein', 'soll auf', 'sollte auf', 'muss auf', 'soll bei', 'sollte bei', 'sollte liegen bei', 'soll liegen bei', 'muss bei'],
     'cue:limit': ['maximum', 'max', 'maximal', 'grenze', 'grenzwert', 'höchstens', 'gesetzlich', 'unter', 'über', 'weniger als', 'mehr als', 'mindestens', 'minimum', 'höchstwert', 'nicht über', 'nicht mehr als', 'obergrenze'],
     'cue:sample-word': ['probe', 'proben', 'bürette', 'pipette', 'becherglas', 'flasche', 'flaschen', 'aliquot', 'vorlage', 'messkolben'],
+    'cue:asks-past': ['wer', 'hat jemand'],
+    'cue:got': ['bekam'],
     'cue:past-time': ['heute morgen', 'heute früh', 'gestern', 'gestern abend', 'vorhin', 'schon', 'bereits', 'heute nachmittag', 'letzte woche', 'heute vormittag', 'eben', 'gerade eben', 'vergoren'],
     'cue:put': [],
     'cue:bag': ['sack', 'säcke', 'beutel à', 'karton', 'kanister', 'eimer voll', 'sack kds', 'gebinde'],

@@ -128,6 +128,8 @@ export const es: Words = {
     'cue:should': ['deberia estar', 'deberia estar en', 'debe estar en', 'tiene que estar en', 'deberia tener', 'debe quedar en', 'tendria que estar en', 'debe ser', 'tiene que ser', 'deberia ser', 'ha de ser', 'debe tener'],
     'cue:limit': ['maximo', 'max', 'limite', 'legal', 'menos de', 'mas de', 'por debajo de', 'por encima de', 'no pasar de', 'sin pasar de', 'como mucho', 'como maximo', 'minimo', 'al menos', 'como minimo', 'limite legal', 'maximo legal'],
     'cue:sample-word': ['muestra', 'muestras', 'bureta', 'pipeta', 'probeta', 'valorante', 'botella', 'botellas', 'alicuota', 'vaso'],
+    'cue:asks-past': ['quien', 'alguien'],
+    'cue:got': ['recibio'],
     'cue:past-time': ['esta manana', 'ayer', 'anoche', 'antes', 'ya', 'esta tarde', 'hace una hora', 'la semana pasada', 'hace', 'hace un rato'],
     'cue:put': ['puesto'],
     'cue:bag': ['saco de', 'sacos de', 'bolsa de', 'bolsas de', 'caja de', 'cajas de', 'garrafa de', 'garrafas de', 'sacos', 'bolsas', 'bidon de'],

@@ -130,6 +130,8 @@ export const fr: Words = {
     'cue:should': ['devrait etre', 'devrait etre a', 'doit etre a', 'doit etre', 'devrait avoir', 'doit arriver a', 'doit faire', 'devrait faire'],
     'cue:limit': ['maximum', 'max', 'limite', 'legale', 'legal', 'moins de', 'plus de', 'au dessous de', 'au dessus de', 'en dessous de', 'sous', 'ne pas depasser', 'au plus', 'minimum', 'au moins', 'limite legale', 'sans depasser', 'plafond'],
     'cue:sample-word': ['echantillon', 'echantillons', 'burette', 'pipette', 'eprouvette', 'bouteille', 'bouteilles', 'becher', 'prise d essai'],
+    'cue:asks-past': ['qui', 'quelqu un'],
+    'cue:got': ['recu'],
     'cue:past-time': ['ce matin', 'hier', 'hier soir', 'deja', 'cet apres midi', 'tout a l heure', 'la semaine derniere', 'il y a'],
     'cue:put': [],
     'cue:bag': ['sac de', 'sacs de', 'carton de', 'cartons de', 'bidon de', 'bidons de', 'sacs', 'sac', 'seau de', 'fut de'],

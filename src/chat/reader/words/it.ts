@@ -133,6 +133,8 @@ export const it: Words = {
     'cue:should': ['dovrebbe essere', 'dovrebbe essere a', 'deve essere', 'deve essere a', 'dovrebbe avere', 'deve stare a', 'deve avere', 'dovrebbe stare a'],
     'cue:limit': ['massimo', 'max', 'limite', 'legale', 'meno di', 'piu di', 'sotto', 'sopra', 'sotto i', 'sopra i', 'non superare', 'al massimo', 'minimo', 'almeno', 'limite legale', 'senza superare', 'tetto'],
     'cue:sample-word': ['campione', 'campioni', 'buretta', 'pipetta', 'becher', 'bottiglia', 'bottiglie', 'aliquota', 'provetta'],
+    'cue:asks-past': ['chi', 'qualcuno'],
+    'cue:got': ['ricevuto'],
     'cue:past-time': ['stamattina', 'ieri', 'ieri sera', 'prima', 'gia', 'oggi pomeriggio', 'un ora fa', 'settimana scorsa', 'fa', 'stamane'],
     'cue:put': [],
     'cue:bag': ['sacco di', 'sacchi di', 'sacchetto di', 'cartone di', 'scatola di', 'tanica di', 'taniche di', 'sacchi', 'sacco', 'fusto di'],

@@ -129,6 +129,8 @@ export const pt: Words = {
     'cue:should': ['deveria estar', 'deveria estar em', 'deve estar em', 'deve estar a', 'deve ter', 'deveria ter', 'tem de estar em', 'tem que estar em', 'deve ser', 'devia estar em', 'deve ficar em', 'deve ficar com', 'deveria ficar com', 'devia ter', 'tem de ter', 'tem que ter', 'devia ficar com'],
     'cue:limit': ['maximo', 'max', 'limite', 'legal', 'menos de', 'mais de', 'abaixo de', 'acima de', 'nao passar de', 'no maximo', 'minimo', 'pelo menos', 'no minimo', 'limite legal', 'sem passar de', 'teto'],
     'cue:sample-word': ['amostra', 'amostras', 'bureta', 'pipeta', 'proveta', 'garrafa', 'garrafas', 'aliquota', 'copo', 'becker'],
+    'cue:asks-past': ['quem', 'alguem'],
+    'cue:got': ['recebeu'],
     'cue:past-time': ['esta manha', 'hoje de manha', 'ontem', 'ontem a noite', 'antes', 'ja', 'esta tarde', 'ha uma hora', 'semana passada', 'na semana passada', 'ha pouco', 'hoje cedo', 'agora mesmo', 'ainda agora'],
     'cue:put': ['posto'],
     'cue:bag': ['saco de', 'sacos de', 'caixa de', 'caixas de', 'bidao de', 'bidoes de', 'sacos', 'saco', 'garrafao de', 'galao de'],
