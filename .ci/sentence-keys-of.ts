@@ -22,7 +22,10 @@ export function sentenceKeys(ftl: string): string {
 /** As the formatter breaks it. */
 function row(key: string, values: string): string {
   const whole = `  ${key}: ${values};`;
-  return whole.length <= LONGEST ? whole : `  ${key}:\n    ${values};`;
+  if (whole.length <= LONGEST) return whole;
+  const below = `    ${values};`;
+  const apart = values.split(' | ').map((one) => `\n    | ${one}`);
+  return below.length <= LONGEST ? `  ${key}:\n${below}` : `  ${key}:${apart.join('')};`;
 }
 
 /** Letters in a line of code. */

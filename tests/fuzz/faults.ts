@@ -125,7 +125,7 @@ function unsaid(reading: Reading, answer: Answer | null, replies: readonly Reply
     ['additive', assumed.additive !== undefined, /metabisulfite/i],
     ['target', assumed.target !== undefined && reading.intent === 'dose', /molecular/i],
     ['stage', assumed.stage !== undefined && reading.intent === 'dose', /malolactic|ferment/i],
-    ['volume', assumed.volume_L !== undefined, /225/],
+    ['volume', assumed.volume_L !== undefined, /225|100 kg/],
     ['gallon', assumed.gallon !== undefined, assumed.gallon === 'US' ? /US gal/i : /imp/i],
   ];
   return signs

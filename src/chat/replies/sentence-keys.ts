@@ -187,10 +187,35 @@ export interface SentenceValues {
   'demo-start-sheets': never;
   'designation-asked': 'region' | 'wine';
   'dose-at-limit':
-    'band' | 'class' | 'high' | 'least' | 'limit' | 'low' | 'now' | 'of' | 'organic' | 'region' | 'standing' | 'unit' | 'vessel' | 'what';
+    | 'band'
+    | 'class'
+    | 'high'
+    | 'least'
+    | 'limit'
+    | 'low'
+    | 'now'
+    | 'of'
+    | 'organic'
+    | 'region'
+    | 'standing'
+    | 'unit'
+    | 'vessel'
+    | 'what';
   'dose-bottled': 'vessel';
   'dose-capped':
-    'after' | 'band' | 'class' | 'high' | 'least' | 'limit' | 'list' | 'low' | 'of' | 'organic' | 'region' | 'unit' | 'what';
+    | 'after'
+    | 'band'
+    | 'class'
+    | 'high'
+    | 'least'
+    | 'limit'
+    | 'list'
+    | 'low'
+    | 'of'
+    | 'organic'
+    | 'region'
+    | 'unit'
+    | 'what';
   'dose-capped-kept': 'error' | 'kept' | 'of' | 'reserve' | 'unit';
   'dose-gas': 'amount' | 'count' | 'vessel';
   'dose-gas-too-little': 'amount' | 'vessel';
@@ -376,7 +401,19 @@ export interface SentenceValues {
   'forecast-unlanded': 'vessel';
   'forgotten-person': 'number';
   'full-dose-asks':
-    'after' | 'band' | 'class' | 'high' | 'least' | 'limit' | 'low' | 'of' | 'organic' | 'region' | 'unit' | 'vessel' | 'what';
+    | 'after'
+    | 'band'
+    | 'class'
+    | 'high'
+    | 'least'
+    | 'limit'
+    | 'low'
+    | 'of'
+    | 'organic'
+    | 'region'
+    | 'unit'
+    | 'vessel'
+    | 'what';
   'full-dose-care': never;
   'full-dose-left': never;
   'full-dose-none': never;
@@ -545,7 +582,23 @@ export interface SentenceValues {
   'limit-care': never;
   'limit-doubt': 'confidence';
   'limit-is':
-    'band' | 'class' | 'density' | 'high' | 'law_unit' | 'limit' | 'low' | 'of' | 'operator' | 'organic' | 'region' | 'unit' | 'uplift' | 'value' | 'vessel' | 'what' | 'written';
+    | 'band'
+    | 'class'
+    | 'density'
+    | 'high'
+    | 'law_unit'
+    | 'limit'
+    | 'low'
+    | 'of'
+    | 'operator'
+    | 'organic'
+    | 'region'
+    | 'unit'
+    | 'uplift'
+    | 'value'
+    | 'vessel'
+    | 'what'
+    | 'written';
   'limit-none': 'product' | 'reason' | 'region' | 'vessel';
   'limit-notes': 'list';
   'limit-notes-separator': never;
@@ -782,12 +835,43 @@ export interface SentenceValues {
     'additive' | 'all' | 'amount' | 'limited' | 'red' | 'redAmount' | 'strength' | 'tablet' | 'unit';
   'round-and-more': 'count';
   'round-capped':
-    'after' | 'band' | 'class' | 'high' | 'least' | 'limit' | 'low' | 'of' | 'organic' | 'region' | 'unit' | 'vessel' | 'what';
+    | 'after'
+    | 'band'
+    | 'class'
+    | 'high'
+    | 'least'
+    | 'limit'
+    | 'low'
+    | 'of'
+    | 'organic'
+    | 'region'
+    | 'unit'
+    | 'vessel'
+    | 'what';
   'round-choice': 'ph' | 'vessel';
   'round-dose':
-    'additive' | 'all' | 'amount' | 'limited' | 'list' | 'red' | 'redAmount' | 'strength' | 'tablet' | 'unit' | 'vessel';
+    | 'additive'
+    | 'all'
+    | 'amount'
+    | 'limited'
+    | 'list'
+    | 'red'
+    | 'redAmount'
+    | 'strength'
+    | 'tablet'
+    | 'unit'
+    | 'vessel';
   'round-dose-bare':
-    'additive' | 'all' | 'amount' | 'limited' | 'red' | 'redAmount' | 'strength' | 'tablet' | 'unit' | 'vessel';
+    | 'additive'
+    | 'all'
+    | 'amount'
+    | 'limited'
+    | 'red'
+    | 'redAmount'
+    | 'strength'
+    | 'tablet'
+    | 'unit'
+    | 'vessel';
   'round-effect': never;
   'round-effect-short': never;
   'round-for-all': 'list';
@@ -1045,7 +1129,17 @@ export interface SentenceValues {
   'warning-free-low-may-bind-all': never;
   'warning-free-needed-high': 'target_free_mg_L' | 'unit';
   'warning-free-over-limit':
-    'band' | 'class' | 'confidence' | 'free_after_mg_L' | 'high' | 'limit_mg_L' | 'low' | 'organic' | 'region' | 'unit' | 'what';
+    | 'band'
+    | 'class'
+    | 'confidence'
+    | 'free_after_mg_L'
+    | 'high'
+    | 'limit_mg_L'
+    | 'low'
+    | 'organic'
+    | 'region'
+    | 'unit'
+    | 'what';
   'warning-label-threshold':
     'comparator' | 'confidence' | 'counts' | 'region' | 'threshold_mg_L' | 'total_after_mg_L' | 'unit_of_law';
   'warning-limit-unconfirmed':
@@ -1062,12 +1156,43 @@ export interface SentenceValues {
   'warning-sodium': 'region';
   'warning-stage-not-over': 'stage';
   'warning-total-near-limit':
-    'band' | 'class' | 'confidence' | 'high' | 'limit_mg_L' | 'low' | 'organic' | 'region' | 'total' | 'total_after_mg_L' | 'unit' | 'what';
+    | 'band'
+    | 'class'
+    | 'confidence'
+    | 'high'
+    | 'limit_mg_L'
+    | 'low'
+    | 'organic'
+    | 'region'
+    | 'total'
+    | 'total_after_mg_L'
+    | 'unit'
+    | 'what';
   'warning-total-over-limit':
-    'band' | 'class' | 'confidence' | 'high' | 'limit_mg_L' | 'low' | 'organic' | 'region' | 'total' | 'total_after_mg_L' | 'unit' | 'what';
+    | 'band'
+    | 'class'
+    | 'confidence'
+    | 'high'
+    | 'limit_mg_L'
+    | 'low'
+    | 'organic'
+    | 'region'
+    | 'total'
+    | 'total_after_mg_L'
+    | 'unit'
+    | 'what';
   'warning-total-unknown': never;
   'warning-total-unknown-most':
-    'band' | 'class' | 'high' | 'limit_mg_L' | 'low' | 'most_total_mg_L' | 'organic' | 'region' | 'unit' | 'what';
+    | 'band'
+    | 'class'
+    | 'high'
+    | 'limit_mg_L'
+    | 'low'
+    | 'most_total_mg_L'
+    | 'organic'
+    | 'region'
+    | 'unit'
+    | 'what';
   'ways-out': never;
   weigh: 'vessel';
   'when-future': 'text' | 'vessel' | 'when';

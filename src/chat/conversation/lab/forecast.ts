@@ -72,7 +72,8 @@ function foundLines(found: Forecast, vessel: Vessel, needed: Needed, here: Here)
     from: isNow ? 'now' : dayOrFar(found.from, here),
     to: dayOrFar(found.to, here),
   };
-  const lost = found.by === 'readings' ? numberText(Math.max(0, 100 * found.lost_in_30_days), 0, mark) : 'none';
+  const lost =
+    found.by === 'readings' ? numberText(Math.max(0, 100 * found.lost_in_30_days), 0, mark) : 'none';
   return [
     line('first', found.below_at === undefined ? 'forecast-steady' : 'forecast-below', {
       ...values,

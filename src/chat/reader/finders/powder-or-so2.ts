@@ -54,7 +54,9 @@ export function findPowderOrSO2(board: Board): void {
       unit.id === 'g/hL' &&
       (!isSO2(board, after) ||
         (board.terms[after]?.tags.includes('label:so2') === true &&
-          !(['add', 'add-behind', 'addition', 'raise', 'past'] as const).some((cue) => holdsCue(board, cue))));
+          !(['add', 'add-behind', 'addition', 'raise', 'past'] as const).some((cue) =>
+            holdsCue(board, cue),
+          )));
     const perLitre = unit.id === 'g/L' && (isAdditive(board, after) || isAdditive(board, before));
     const other = [after, before].find((k) => board.terms[k]?.tags.includes('additive:none') === true);
     if (perHectolitre && other !== undefined && !beside) {

@@ -11,6 +11,9 @@ const SMALLEST_CLEAR_STEP_mg_L = 5;
 const isPhNamed = (board: Board): boolean => board.terms.some((_, k) => hasTag(board, k, 'label:ph'));
 
 /** `from 18 to 32`, `free 18 to 32`, `18 -> 32`: where it is and where it should go. */
+/** `6 barricas de 16 a 28`: counted barrels have no numbers. */
+const isCounted = (board: Board, i: number): boolean => board.terms[i - 1]?.kind === 'number';
+
 function findWayAt(board: Board, i: number): boolean {
   const first = aimAt(board, i);
   if (!first || (first.kind !== undefined && first.kind !== 'free')) return false;
@@ -56,6 +59,17 @@ function findWayAt(board: Board, i: number): boolean {
   const said = isFrom(i - 1) || isFrom(labelAt - 1);
   // `target 30 to 35`, `add 20 to 25`: a range of what is wanted, and no way from one to the other.
   if (!arrow && (isCue(board, i - 1, 'target') || isCue(board, isFrom(i - 1) ? i - 2 : i - 1, 'add'))) {
+    refuse(board, 'ambiguous-number', i, second.to);
+    return true;
+  }
+  // `barrique da 16 a 28`: one barrel from level to level, or thirteen of them?
+  if (
+    before === undefined &&
+    isFrom(i - 1) &&
+    hasTag(board, i - 2, 'vessel:barrel') &&
+    !isCounted(board, i - 2) &&
+    !board.cues.has('label:free')
+  ) {
     refuse(board, 'ambiguous-number', i, second.to);
     return true;
   }
