@@ -74,8 +74,9 @@ export function createLeanFetch(): LeanFetch {
         settle();
         // Most likely the other side closed a waiting connection just as we took it.
         const stale = request.reusedSocket && error.code === 'ECONNRESET';
-        // What came in pieces is spent.
-        if (stale && mayRepeat && !isInPieces(body)) resolve(call(url, init, false));
+        // What came in pieces is spent, and what was given up is wanted no more.
+        const mayAgain = mayRepeat && signal?.aborted !== true && !isInPieces(body);
+        if (stale && mayAgain) resolve(call(url, init, false));
         else reject(error);
       });
       request.on('response', (response) => {
