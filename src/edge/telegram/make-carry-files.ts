@@ -91,7 +91,12 @@ export function makeCarryFiles(options: CarryOptions): CarryFiles {
       const notSent: Outcome = { said: [failed(inLanguage)], isFailed: true };
       const doing = DOING[errand.kind] ?? 'typing';
       const running = (async (): Promise<Outcome> => {
-        const { said, file, more = [], isFailed = false } = await work.runErrand(errand, inLanguage);
+        const {
+          said,
+          file,
+          more = [],
+          isFailed = false,
+        } = await whileTyping({ ...arrival, doing }, work.runErrand(errand, inLanguage), sending);
         if (file === undefined) return { said, isFailed };
         const [first] = said;
         const isBeside =
@@ -106,7 +111,7 @@ export function makeCarryFiles(options: CarryOptions): CarryFiles {
         {
           spot: arrival,
           language: errand.language,
-          work: whileTyping({ ...arrival, doing }, running, sending),
+          work: running,
           failureOf: (outcome) => (outcome.isFailed ? 'errand-failed' : undefined),
         },
         sending,

@@ -17,6 +17,9 @@ export type Doing = 'typing' | 'upload_photo' | 'upload_document';
 /** The platform shows it for five seconds or less. */
 const AGAIN_MS = 4500;
 
+/** So long the last showing may be on its way. */
+const LONGEST_LAST_MS = 1000;
+
 /** Shows that something is done, for as long as it takes. That it cannot be shown harms nothing. */
 export async function whileTyping<T>(
   { chatId, threadId, doing }: Spot & { readonly doing: Doing },
@@ -31,10 +34,12 @@ export async function whileTyping<T>(
       await clock.wait(AGAIN_MS, ended.signal);
     }
   };
-  void show();
+  const shown = show();
   try {
     return await work;
   } finally {
     ended.abort();
+    // What is sent next may be refused for a while, and nothing of ours must come after that.
+    await Promise.race([shown, clock.wait(LONGEST_LAST_MS, signal)]);
   }
 }
