@@ -696,7 +696,7 @@ problem-ambiguous-number =
         [degree] { at }« { $about } » : alcool ou température ? Écrire : { $one }% vol, ou : { $one } C
         [to] { at }« { $about } » : { $two } est-il l’objectif ? Écrire : libre { $one }, objectif { $two }
         [range] { at }« { $about } » ressemble à une fourchette. N’en écrire qu’un : libre { $one }, ou : libre { $two }
-        [pair] { at }« { $about } » : libre et total, ou une lecture entre deux traits ? Écrire : libre { $one } total { $two }, ou : libre { $one }
+        [pair] { at }« { $about } » : libre et total, ou une valeur lue entre deux traits ? Écrire : libre { $one } total { $two }, ou : libre { $one }
         [free] { at }« { $about } » : SO2 libre ou total ? Écrire : libre { $one }, ou : total { $one }
         [aim] { at }« { $about } » : à ajouter, ou à atteindre ? Écrire : ajouter { $one } ppm, ou : objectif { $one }
        *[other] { at }« { $about } » peut se lire de plusieurs façons. Dire ce que c’est, par ex. : pH 3,58 libre 21 45 hl
