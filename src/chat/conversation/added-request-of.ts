@@ -1,4 +1,4 @@
-import type { WineTraits } from '../../core/cellar/entry.ts';
+import { traitsOf } from '../../core/cellar/traits-of.ts';
 import type { AddedRequest } from '../../core/dose/request.ts';
 import type { Reading } from '../reader/understood.ts';
 import type { Here } from './here.ts';
@@ -12,11 +12,8 @@ export function addedRequestOf(reading: Reading, here: Pick<Here, 'vessels' | 's
   const request = toAddedRequest(reading);
   if (vessel === undefined) return request;
   const total = totalOfVessel(vessel);
-  const traits: WineTraits = Object.fromEntries(
-    Object.entries(vessel.traits).map(([trait, { value }]) => [trait, value]),
-  );
   return {
-    ...traits,
+    ...traitsOf(vessel),
     ...request,
     region: here.settings.region,
     ...(total && {

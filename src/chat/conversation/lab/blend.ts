@@ -5,6 +5,7 @@ import { holdsWine } from '../../../core/cellar/pour.ts';
 import type { Vessel } from '../../../core/cellar/vessel.ts';
 import { pKOf } from '../../../core/chemistry/dissociation.ts';
 import { MOLECULAR_SMELT_mg_L } from '../../../core/dose/thresholds.ts';
+import { traitsOf } from '../../../core/cellar/traits-of.ts';
 import { limitsFor } from '../../../core/limits/limits-for.ts';
 import { neededOf } from '../../attachments/chart/needed-of.ts';
 import type { Command } from '../../reader/command.ts';
@@ -97,15 +98,11 @@ function measuredOf(vessel: Vessel): Omit<BlendPart, 'volume_L'> {
 
 /** The stricter limit of both wines, what the first one's target asks for, and what people smell. */
 function boundsOf(wine: Vessel, other: Vessel, here: Here): BlendBounds {
-  const limits = [wine, other].map(({ traits }) =>
-    limitsFor({
-      region: here.settings.region,
-      ...(traits.style && { style: traits.style.value }),
-      ...(traits.category && { category: traits.category.value }),
-      ...(traits.product && { product: traits.product.value }),
-      ...(traits.sugar_g_L && { sugar_g_L: traits.sugar_g_L.value }),
-    }),
-  );
+  const limits = [wine, other].map((one) => {
+    // Must has no limit of its own, but what it is blended into has.
+    const { stage: _stage, ...traits } = traitsOf(one);
+    return limitsFor({ ...traits, region: here.settings.region });
+  });
   const strictest = (of: 'total' | 'free'): number =>
     Math.min(...limits.map((one) => one[of]?.limit_mg_L ?? Infinity));
   const [total, free] = [strictest('total'), strictest('free')];

@@ -1,5 +1,5 @@
 import type { Vessel } from '../../../../core/cellar/vessel.ts';
-import type { WineTraits } from '../../../../core/cellar/entry.ts';
+import { traitsOf } from '../../../../core/cellar/traits-of.ts';
 import { portionOf } from '../../../../core/dose/portion.ts';
 import { roomToLimit, beforeOf, type RoomToLimit } from '../../../../core/dose/room-to-limit.ts';
 import { LAW_TEXTS } from '../../../../core/limits/law-texts.ts';
@@ -40,9 +40,7 @@ export function limitSheet(reading: Reading, here: Here): Handled {
 /** What is known of the wine: what was said goes before what is known of the vessel. */
 function factsOf(vessel: Vessel | undefined, reading: Reading, region: Region): Facts {
   const { fields } = reading;
-  const traits: WineTraits = Object.fromEntries(
-    Object.entries(vessel?.traits ?? {}).map(([trait, { value }]) => [trait, value]),
-  );
+  const traits = vessel === undefined ? {} : traitsOf(vessel);
   const total = vessel && totalOfVessel(vessel);
   const free_mg_L = fields.free_mg_L ?? vessel?.free_mg_L?.value;
   const total_mg_L = fields.total_mg_L ?? total?.total_mg_L;

@@ -1,4 +1,4 @@
-import type { WineTraits } from '../../../../core/cellar/entry.ts';
+import { traitsOf } from '../../../../core/cellar/traits-of.ts';
 import type { Vessel } from '../../../../core/cellar/vessel.ts';
 import { limitsFor } from '../../../../core/limits/limits-for.ts';
 import type { Region } from '../../../../core/limits/region.ts';
@@ -10,22 +10,20 @@ import { replying } from '../../replying.ts';
 import { zoneOf } from '../../zone.ts';
 
 /** The limit of total SO2 that a wine is held against, in mg/L; only one whose text was read is drawn as a line. */
-function limitOfTotal(vessel: Vessel | undefined, region: Region): number | undefined {
-  const traits: WineTraits = Object.fromEntries(
-    Object.entries(vessel?.traits ?? {}).map(([trait, { value }]) => [trait, value]),
-  );
-  const { total } = limitsFor({ ...traits, region, organic: traits.organic ?? false });
+function limitOfTotal(vessel: Vessel, region: Region): number | undefined {
+  const { total } = limitsFor({ ...traitsOf(vessel), region });
   return total?.confidence === 'read' ? total.limit_mg_L : undefined;
 }
 
 /** A picture of a vessel's SO2: it is made at the edge. */
 export function drawPicture(vessel: string | undefined, here: Here): Handled {
-  if (vessel === undefined || !here.vessels.has(vessel)) {
+  const kept = vessel === undefined ? undefined : here.vessels.get(vessel);
+  if (vessel === undefined || kept === undefined) {
     const values = { vessel: vessel === undefined ? 'none' : vesselName(vessel) };
     return replying(here, { lines: [line('first', 'picture-none', values)] });
   }
   const { settings, memory } = here;
-  const limit_mg_L = limitOfTotal(here.vessels.get(vessel), settings.region);
+  const limit_mg_L = limitOfTotal(kept, settings.region);
   return {
     ...replying(here, { lines: [] }),
     replies: [],

@@ -1,4 +1,5 @@
 import type { CellarView } from '../../../../core/cellar/cellar-store.ts';
+import { additiveOf } from '../../../../core/cellar/apply-addition.ts';
 import type { StockMovement } from '../../../../core/cellar/entry.ts';
 import { lotsLeft } from '../../../../core/cellar/lots-left.ts';
 import { stockMove } from '../../../../core/cellar/stock-move.ts';
@@ -90,18 +91,14 @@ function lackOf({ fields, marks }: Reading, { event, several }: StockNote): stri
 
 function movementOf(reading: Reading, { event, supplier, purpose }: StockNote): StockMovement {
   const { fields, chemical_lot, remark, strength_of } = reading;
-  const { additive, strength_percent, tablet_SO2_g, tablet_salt_g, mass_g, additive_volume_mL, tablets } =
-    fields;
+  const { mass_g, additive_volume_mL, tablets } = fields;
   const said = [purpose, remark].filter((one) => one !== undefined).join('; ');
   return {
     kind: 'stock',
     event,
     vessels: [],
-    ...(additive !== undefined && { additive }),
-    ...(strength_percent !== undefined && { strength_percent }),
+    ...additiveOf(fields),
     ...(strength_of !== undefined && { strength_of }),
-    ...(tablet_SO2_g !== undefined && { tablet_SO2_g }),
-    ...(tablet_salt_g !== undefined && { tablet_salt_g }),
     ...(chemical_lot !== undefined && { chemical_lot }),
     ...(mass_g !== undefined && { mass_g }),
     ...(additive_volume_mL !== undefined && { additive_volume_mL }),
